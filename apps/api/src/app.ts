@@ -1,0 +1,135 @@
+import { readFile } from 'node:fs/promises';
+import { existsSync } from 'node:fs';
+import path from 'node:path';
+import { fileURLToPath } from 'node:url';
+import compression from 'compression';
+import express, { type Express, type RequestHandler, type Router } from 'express';
+import helmet from 'helmet';
+import { pinoHttp } from 'pino-http';
+import type { Context } from './context.ts';
+import { errorHandler } from './http/error-handler.ts';
+import { notFound } from './http/problem.ts';
+import { sameOrigin } from './http/same-origin.ts';
+import { sessions } from './http/session.ts';
+import { activityRoutes } from './modules/activity/activity.routes.ts';
+import { customerRoutes } from './modules/customers/customers.routes.ts';
+import { hardwareRoutes } from './modules/hardware/hardware.routes.ts';
+import { invoiceRoutes } from './modules/invoices/invoices.routes.ts';
+import { jobRoutes } from './modules/jobs/jobs.routes.ts';
+import { layoutRoutes } from './modules/layouts/layouts.routes.ts';
+import { leatherRoutes } from './modules/leathers/leathers.routes.ts';
+import { linkRoutes } from './modules/links/links.routes.ts';
+import { lotRoutes } from './modules/lots/lots.routes.ts';
+import { orderRoutes } from './modules/orders/orders.routes.ts';
+import { patternRoutes } from './modules/patterns/patterns.routes.ts';
+import { peopleRoutes } from './modules/people/people.routes.ts';
+import { periodRoutes } from './modules/periods/periods.routes.ts';
+import { purchaseOrderRoutes } from './modules/purchase-orders/purchase-orders.routes.ts';
+import { quoteRoutes } from './modules/quotes/quotes.routes.ts';
+import { searchRoutes } from './modules/search/search.routes.ts';
+import { stockRoutes } from './modules/stock/stock.routes.ts';
+import { supplierRoutes } from './modules/suppliers/suppliers.routes.ts';
+import { taxRateRoutes } from './modules/tax-rates/tax-rates.routes.ts';
+import { todayRoutes } from './modules/today/today.routes.ts';
+import { toolRoutes } from './modules/tools/tools.routes.ts';
+import { workshopRoutes } from './modules/workshop/workshop.routes.ts';
+import { sessionRoutes } from './modules/session/session.routes.ts';
+import { systemRoutes } from './modules/system/system.routes.ts';
+
+/** Every room of the API. */
+const rooms: ((context: Context) => Router)[] = [
+  systemRoutes,
+  leatherRoutes,
+  workshopRoutes,
+  peopleRoutes,
+  activityRoutes,
+  todayRoutes,
+  searchRoutes,
+  customerRoutes,
+  quoteRoutes,
+  linkRoutes,
+  orderRoutes,
+  patternRoutes,
+  layoutRoutes,
+  toolRoutes,
+  jobRoutes,
+  lotRoutes,
+  hardwareRoutes,
+  supplierRoutes,
+  purchaseOrderRoutes,
+  stockRoutes,
+  invoiceRoutes,
+  taxRateRoutes,
+  periodRoutes,
+];
+
+const web = fileURLToPath(new URL('../../web/dist', import.meta.url));
+
+/** The whole application, not yet listening. */
+export async function createApp(context: Context): Promise<Express> {
+  const app = express();
+  const { middleware, authenticate } = await sessions(context);
+  app.disable('x-powered-by');
+  app.set('query parser', 'simple');
+  app.use(pinoHttp({ logger: context.log, serializers: { req: withoutTokens } }));
+  app.use(helmet(headers(context)));
+  app.use(compression());
+  app.use('/api', noStore, sameOrigin(context.config), express.json({ limit: '1mb' }), ...middleware);
+  app.use('/api', sessionRoutes(context, authenticate), ...rooms.map((room) => room(context)));
+  app.use('/api', () => {
+    throw notFound('address');
+  });
+  await serveWeb(app);
+  app.use(errorHandler);
+  return app;
+}
+
+const noStore: RequestHandler = (_request, response, next) => {
+  response.set('Cache-Control', 'no-store');
+  next();
+};
+
+function headers(context: Context): Parameters<typeof helmet>[0] {
+  const overTls = context.config.tls !== undefined;
+  return {
+    contentSecurityPolicy: {
+      useDefaults: false,
+      directives: {
+        defaultSrc: ["'self'"],
+        imgSrc: ["'self'", 'data:', 'blob:'],
+        objectSrc: ["'none'"],
+        baseUri: ["'none'"],
+        formAction: ["'self'"],
+        frameAncestors: ["'none'"],
+      },
+    },
+    strictTransportSecurity: overTls,
+    crossOriginOpenerPolicy: overTls,
+    originAgentCluster: overTls,
+    referrerPolicy: { policy: 'no-referrer' },
+  };
+}
+
+/** A customer's token never reaches the log. */
+function withoutTokens(request: { id: unknown; method: string; url: string }) {
+  const url = request.url.replace(/\/(c|links)\/[^/?#]+/, '/$1/…');
+  return { id: request.id, method: request.method, url };
+}
+
+/** The built web application; every address that is no file is answered by its page. */
+async function serveWeb(app: Express): Promise<void> {
+  const page = path.join(web, 'index.html');
+  if (!existsSync(page)) return;
+  const html = await readFile(page, 'utf8');
+  app.use(express.static(web, { index: false, setHeaders: cacheForever }));
+  app.get('/{*path}', (_request, response) => {
+    response.type('html').set('Cache-Control', 'no-store').send(html);
+  });
+}
+
+/** Built files carry a hash in their names. */
+function cacheForever(response: { setHeader(name: string, value: string): void }, file: string): void {
+  if (file.includes(`${path.sep}assets${path.sep}`)) {
+    response.setHeader('Cache-Control', 'public, max-age=31536000, immutable');
+  }
+}

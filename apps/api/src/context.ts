@@ -1,0 +1,44 @@
+import { mkdir } from 'node:fs/promises';
+import path from 'node:path';
+import { MikroORM } from '@mikro-orm/sqlite';
+import { pino, type Logger } from 'pino';
+import { databaseFile, type Config } from './config.ts';
+import { assertSound } from './db/sound.ts';
+import { ormConfig } from './mikro-orm.config.ts';
+import { systemClock, type Clock } from './outside/clock.ts';
+import { FileStore } from './outside/file-store.ts';
+import { connectMail, type Mailer } from './outside/mailer.ts';
+import { startWorkers, type Workers } from './workers/pool.ts';
+
+/** What a request needs, built once and handed in. */
+export interface Context {
+  config: Config;
+  orm: MikroORM;
+  clock: Clock;
+  log: Logger;
+  mailer: Mailer;
+  files: FileStore;
+  workers: Workers;
+}
+
+/** Opens the data folder and what lies in it; `clock` is the system's unless a test or the demo brings its own. */
+export async function createContext(config: Config, clock: Clock = systemClock): Promise<Context> {
+  await mkdir(config.dataDir, { recursive: true });
+  const orm = await MikroORM.init(ormConfig(databaseFile(config.dataDir)));
+  await orm.getMigrator().up();
+  await assertSound(orm);
+  return {
+    config,
+    orm,
+    clock,
+    log: pino({ level: config.logLevel, redact: ['req.headers.cookie', 'res.headers["set-cookie"]'] }),
+    mailer: connectMail(config),
+    files: new FileStore(path.join(config.dataDir, 'files')),
+    workers: startWorkers(config),
+  };
+}
+
+export async function closeContext(context: Context): Promise<void> {
+  await context.workers.close();
+  await context.orm.close(true);
+}

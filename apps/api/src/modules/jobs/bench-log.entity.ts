@@ -1,0 +1,42 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { TimeType } from '../../db/columns/columns.ts';
+
+/** What a maker logged on a step; never changed, a slip is put right by a further row. */
+@Entity({ tableName: 'bench_log' })
+export class BenchLog {
+  [OptionalProps]?: 'note';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  jobStepId!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  good!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  rejects!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  seconds!: number;
+
+  @Property({ type: TimeType, columnType: 'integer' })
+  minutes!: Decimal;
+
+  @Property({ type: 'text', columnType: 'text' })
+  note = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  at!: string;
+
+  @Property({ type: 'text', columnType: 'text' })
+  day!: string;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  personId: number | null = null;
+
+  @Property({ type: 'text', columnType: 'text' })
+  personName!: string;
+}

@@ -1,0 +1,42 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { OunceType, UnitPriceType } from '../../db/columns/columns.ts';
+
+/** What a supplier sells: tannage, colour, finish, weight. */
+@Entity({ tableName: 'leather' })
+export class Leather {
+  [OptionalProps]?: 'tannage' | 'colour' | 'finish' | 'active' | 'version';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  name!: string;
+
+  @Property({ type: 'text', columnType: 'text' })
+  tannage = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  colour = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  finish = '';
+
+  @Property({ type: OunceType, columnType: 'integer', nullable: true })
+  weightLowOz: Decimal | null = null;
+
+  @Property({ type: OunceType, columnType: 'integer', nullable: true })
+  weightHighOz: Decimal | null = null;
+
+  @Property({ type: UnitPriceType, columnType: 'integer' })
+  pricePerFt2!: Decimal;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  supplierId: number | null = null;
+
+  @Property({ type: 'boolean', columnType: 'integer' })
+  active = true;
+
+  @Property({ type: 'integer', columnType: 'integer', version: true })
+  version!: number;
+}

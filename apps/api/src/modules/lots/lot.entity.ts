@@ -1,0 +1,62 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { AreaType, LengthType, MoneyType } from '../../db/columns/columns.ts';
+
+/** One side, hide or bundle of panels on the rack. */
+@Entity({ tableName: 'lot' })
+export class Lot {
+  [OptionalProps]?: 'pieces' | 'grade' | 'shade' | 'place' | 'supplierLot' | 'version';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  tag!: string;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  leatherId!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  form!: 'side' | 'hide' | 'back' | 'bend' | 'shoulder' | 'double shoulder' | 'belly' | 'panel' | 'strip' | 'offcut';
+
+  /** As measured when it came, all panels of the bundle together. */
+  @Property({ type: AreaType, columnType: 'integer' })
+  measuredAreaMm2!: Decimal;
+
+  /** How many panels or strips the bundle held. */
+  @Property({ type: 'integer', columnType: 'integer' })
+  pieces = 1;
+
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  widthMm: Decimal | null = null;
+
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  heightMm: Decimal | null = null;
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  cost!: Decimal;
+
+  @Property({ type: 'text', columnType: 'text' })
+  grade = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  shade = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  place = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  supplierLot = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  receivedOn!: string;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  purchaseLineId: number | null = null;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  parentId: number | null = null;
+
+  @Property({ type: 'integer', columnType: 'integer', version: true })
+  version!: number;
+}

@@ -1,0 +1,35 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { UnitPriceType } from '../../db/columns/columns.ts';
+
+/** What is ordered on one line: leather by area, or hardware by the piece. */
+@Entity({ tableName: 'purchase_line' })
+export class PurchaseLine {
+  [OptionalProps]?: 'received';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  purchaseOrderId!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  position!: number;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  leatherId: number | null = null;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  hardwareId: number | null = null;
+
+  /** Thousandths of mm², or pieces. */
+  @Property({ type: 'integer', columnType: 'integer' })
+  quantity!: number;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  received = 0;
+
+  /** Per ft², or per piece. */
+  @Property({ type: UnitPriceType, columnType: 'integer' })
+  unitPrice!: Decimal;
+}

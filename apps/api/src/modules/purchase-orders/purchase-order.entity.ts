@@ -1,0 +1,34 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+
+/** An order to a supplier. */
+@Entity({ tableName: 'purchase_order' })
+export class PurchaseOrder {
+  [OptionalProps]?: 'note' | 'version';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  number!: string;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  supplierId!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  state!: 'draft' | 'sent' | 'part received' | 'received' | 'cancelled';
+
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  sentAt: string | null = null;
+
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  expectedOn: string | null = null;
+
+  @Property({ type: 'text', columnType: 'text' })
+  note = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  createdAt!: string;
+
+  @Property({ type: 'integer', columnType: 'integer', version: true })
+  version!: number;
+}

@@ -1,0 +1,50 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { MoneyType } from '../../db/columns/columns.ts';
+
+/** A cutting die or a stamp plate: what it cost, how much life it has, where it lives. */
+@Entity({ tableName: 'tool' })
+export class Tool {
+  [OptionalProps]?: 'metal' | 'used' | 'slot' | 'version';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  /** As people call it: 7, 41. */
+  @Property({ type: 'text', columnType: 'text' })
+  number!: string;
+
+  @Property({ type: 'text', columnType: 'text' })
+  kind!: 'cutting die' | 'stamp plate';
+
+  @Property({ type: 'text', columnType: 'text' })
+  name!: string;
+
+  @Property({ type: 'text', columnType: 'text' })
+  metal = '';
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  cost!: Decimal;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  lifeUses!: number;
+
+  /** Cuts or impressions so far: the sum of its ledger. */
+  @Property({ type: 'integer', columnType: 'integer' })
+  used = 0;
+
+  @Property({ type: 'text', columnType: 'text' })
+  slot = '';
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  patternId: number | null = null;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  customerId: number | null = null;
+
+  @Property({ type: 'text', columnType: 'text' })
+  state!: 'on the rack' | 'on order' | 'scrapped';
+
+  @Property({ type: 'integer', columnType: 'integer', version: true })
+  version!: number;
+}

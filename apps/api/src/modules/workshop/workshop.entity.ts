@@ -1,0 +1,83 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { LengthType, MoneyType, PercentType, TimeType } from '../../db/columns/columns.ts';
+
+/** The shop itself and its starting values: one row, made when the database is. */
+@Entity({ tableName: 'workshop' })
+export class Workshop {
+  [OptionalProps]?: 'currency' | 'areaUnit' | 'lengthUnit' | 'timeZone' | 'deskMinutesPerOrder' | 'quoteValidDays' | 'paymentTermDays' | 'address' | 'taxNumber' | 'version';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  mode!: 'demo' | 'shop';
+
+  @Property({ type: 'text', columnType: 'text' })
+  name!: string;
+
+  @Property({ type: 'text', columnType: 'text' })
+  currency = 'USD';
+
+  @Property({ type: 'text', columnType: 'text' })
+  areaUnit: 'ft2' | 'dm2' | 'm2' = 'ft2';
+
+  @Property({ type: 'text', columnType: 'text' })
+  lengthUnit: 'mm' | 'in' = 'mm';
+
+  @Property({ type: 'text', columnType: 'text' })
+  timeZone = 'UTC';
+
+  /** What a bench hour should leave, before wages. */
+  @Property({ type: MoneyType, columnType: 'integer' })
+  targetPerHour!: Decimal;
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  wagePerHour!: Decimal;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  deskMinutesPerOrder = 45;
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  packingPerOrder!: Decimal;
+
+  @Property({ type: PercentType, columnType: 'integer' })
+  rejectPercent!: Decimal;
+
+  /** How sure a cut count must be that enough good pieces remain. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  confidencePercent!: Decimal;
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  priceStep!: Decimal;
+
+  @Property({ type: TimeType, columnType: 'integer' })
+  benchHoursPerDay!: Decimal;
+
+  @Property({ type: LengthType, columnType: 'integer' })
+  spacingMm!: Decimal;
+
+  @Property({ type: LengthType, columnType: 'integer' })
+  trimMm!: Decimal;
+
+  @Property({ type: PercentType, columnType: 'integer' })
+  depositPercent!: Decimal;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  quoteValidDays = 30;
+
+  @Property({ type: 'integer', columnType: 'integer' })
+  paymentTermDays = 30;
+
+  @Property({ type: 'text', columnType: 'text' })
+  address = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  taxNumber = '';
+
+  @Property({ type: 'integer', columnType: 'integer', version: true })
+  version!: number;
+
+  @Property({ type: 'text', columnType: 'text' })
+  createdAt!: string;
+}

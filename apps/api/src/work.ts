@@ -1,0 +1,43 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+import type { Context } from './context.ts';
+import { dayIn } from './outside/clock.ts';
+import { Workshop } from './modules/workshop/workshop.entity.ts';
+
+/** Who does something: a person who is signed in, a customer by a link, or the program itself. */
+export interface Actor {
+  id: number | null;
+  name: string;
+  role: 'owner' | 'maker' | 'bookkeeper' | 'customer' | 'program';
+}
+
+export const theProgram: Actor = { id: null, name: 'Hidewright', role: 'program' };
+
+/** One use case under way: everything it writes commits together or not at all. */
+export interface Work {
+  em: EntityManager;
+  actor: Actor;
+  /** The instant of this use case, the same throughout. */
+  now: Date;
+  /** The shop's calendar day, YYYY-MM-DD. */
+  today: string;
+}
+
+/** Runs a use case in one IMMEDIATE transaction. Inside it only SQL. */
+export async function inTransaction<T>(
+  context: Context,
+  actor: Actor,
+  useCase: (work: Work) => Promise<T>,
+): Promise<T> {
+  return context.orm.em.fork().transactional(async (em) => useCase(await workOn(context, em, actor)));
+}
+
+/** A use case that only reads, on its own identity map. */
+export async function reading<T>(context: Context, actor: Actor, useCase: (work: Work) => Promise<T>): Promise<T> {
+  return useCase(await workOn(context, context.orm.em.fork(), actor));
+}
+
+async function workOn(context: Context, em: EntityManager, actor: Actor): Promise<Work> {
+  const now = context.clock.now();
+  const workshop = await em.findOne(Workshop, 1);
+  return { em, actor, now, today: dayIn(workshop?.timeZone ?? 'UTC', now) };
+}

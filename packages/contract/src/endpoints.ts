@@ -1,0 +1,58 @@
+import * as activity from './activity.ts';
+import * as customers from './customers.ts';
+import type { Endpoint } from './endpoint.ts';
+import * as hardware from './hardware.ts';
+import * as invoices from './invoices.ts';
+import * as jobs from './jobs.ts';
+import * as layouts from './layouts.ts';
+import * as leathers from './leathers.ts';
+import * as links from './links.ts';
+import * as lots from './lots.ts';
+import * as orders from './orders.ts';
+import * as patterns from './patterns.ts';
+import * as people from './people.ts';
+import * as periods from './periods.ts';
+import * as purchaseOrders from './purchase-orders.ts';
+import * as quotes from './quotes.ts';
+import * as search from './search.ts';
+import * as session from './session.ts';
+import * as stock from './stock.ts';
+import * as suppliers from './suppliers.ts';
+import * as system from './system.ts';
+import * as taxRates from './tax-rates.ts';
+import * as today from './today.ts';
+import * as tools from './tools.ts';
+import * as workshop from './workshop.ts';
+
+const rooms: Record<string, unknown>[] = [
+  system,
+  session,
+  workshop,
+  people,
+  activity,
+  today,
+  search,
+  customers,
+  quotes,
+  links,
+  orders,
+  patterns,
+  layouts,
+  tools,
+  jobs,
+  leathers,
+  lots,
+  hardware,
+  suppliers,
+  purchaseOrders,
+  stock,
+  invoices,
+  taxRates,
+  periods,
+];
+
+const isEndpoint = (value: unknown): value is Endpoint =>
+  typeof value === 'object' && value !== null && 'method' in value && 'path' in value && 'access' in value;
+
+/** Everything the API does. A room's file is named here once; its endpoints are then served, documented and tested. */
+export const endpoints: readonly Endpoint[] = rooms.flatMap((room) => Object.values(room).filter(isEndpoint));

@@ -1,0 +1,73 @@
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { id, idParams, line, optionalLine, ounces, page, pageQuery, unitPrice, version } from './fields.ts';
+
+const typed = {
+  name: line(80, 'Enter a name, such as Oak tan russet 5–6 oz.'),
+  tannage: optionalLine(60).default(''),
+  colour: optionalLine(60).default(''),
+  finish: optionalLine(60).default(''),
+  weightLowOz: ounces.nullable().default(null),
+  weightHighOz: ounces.nullable().default(null),
+  pricePerFt2: unitPrice,
+  supplierId: id.nullable().default(null),
+};
+
+export const leather = z
+  .object({
+    id,
+    name: z.string(),
+    tannage: z.string(),
+    colour: z.string(),
+    finish: z.string(),
+    weightLowOz: z.string().nullable(),
+    weightHighOz: z.string().nullable(),
+    pricePerFt2: confidential(z.string()),
+    supplierId: id.nullable(),
+    active: z.boolean(),
+    version,
+  })
+  .meta({ id: 'Leather' });
+export type Leather = z.infer<typeof leather>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+
+export const listLeathers = endpoint({
+  method: 'GET',
+  path: '/leathers',
+  summary: 'The leathers that the shop buys',
+  access: everybody,
+  query: pageQuery,
+  reply: page(leather),
+});
+
+export const readLeather = endpoint({
+  method: 'GET',
+  path: '/leathers/{id}',
+  summary: 'One leather',
+  access: everybody,
+  params: idParams,
+  reply: leather,
+});
+
+export const addLeather = endpoint({
+  method: 'POST',
+  path: '/leathers',
+  summary: 'Add a leather',
+  access: ['owner'],
+  creates: true,
+  body: z.strictObject(typed),
+  reply: leather,
+});
+
+export const changeLeather = endpoint({
+  method: 'PATCH',
+  path: '/leathers/{id}',
+  summary: 'Change a leather',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject({ ...typed, active: z.boolean().default(true) }).partial(),
+  reply: leather,
+});

@@ -1,0 +1,40 @@
+import { defineConfig, type TestProjectInlineConfiguration } from 'vitest/config';
+
+/** Time limits are for hangs only; speed is measured by the benches. */
+const hang = { testTimeout: 60_000, hookTimeout: 120_000 };
+
+function unit(name: string, root: string): TestProjectInlineConfiguration {
+  return { test: { name, root, include: ['**/*.test.{ts,tsx}'], ...hang } };
+}
+
+/** Whole programs started as processes: one at a time, since each wants a core and a half. */
+function whole(name: string, root: string, include: string): TestProjectInlineConfiguration {
+  return {
+    test: {
+      name,
+      root,
+      include: [include],
+      fileParallelism: false,
+      testTimeout: 300_000,
+      hookTimeout: 600_000,
+    },
+  };
+}
+
+export default defineConfig({
+  test: {
+    maxWorkers: 2,
+    projects: [
+      unit('domain', 'packages/domain'),
+      unit('contract', 'packages/contract'),
+      unit('web', 'apps/web'),
+      unit('stand-ins', 'apps/stand-ins'),
+      unit('lint', 'tests/lint'),
+      unit('published', 'tests/published'),
+      'apps/*/vitest.config.ts',
+      whole('e2e', 'tests/e2e', '**/*.e2e.ts'),
+      whole('commands', 'tests/commands', '**/*.test.ts'),
+      whole('drills', 'tests/drills', '**/*.drill.ts'),
+    ],
+  },
+});
