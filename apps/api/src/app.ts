@@ -71,7 +71,8 @@ export async function createApp(context: Context): Promise<Express> {
   const { middleware, authenticate } = await sessions(context);
   app.disable('x-powered-by');
   app.set('query parser', 'simple');
-  app.use(pinoHttp({ logger: context.log, serializers: { req: withoutTokens } }));
+  app.set('etag', false);
+  app.use(pinoHttp({ logger: context.log, serializers: { req: withoutTokens, res: onlyStatus } }));
   app.use(helmet(headers(context)));
   app.use(compression());
   app.use('/api', noStore, sameOrigin(context.config), express.json({ limit: '1mb' }), ...middleware);
@@ -103,11 +104,16 @@ function headers(context: Context): Parameters<typeof helmet>[0] {
         frameAncestors: ["'none'"],
       },
     },
+    frameguard: { action: 'deny' },
     strictTransportSecurity: overTls,
     crossOriginOpenerPolicy: overTls,
     originAgentCluster: overTls,
     referrerPolicy: { policy: 'no-referrer' },
   };
+}
+
+function onlyStatus(response: { statusCode: number }) {
+  return { statusCode: response.statusCode };
 }
 
 /** A customer's token never reaches the log. */

@@ -8,6 +8,7 @@ import { ormConfig } from './mikro-orm.config.ts';
 import { systemClock, type Clock } from './outside/clock.ts';
 import { FileStore } from './outside/file-store.ts';
 import { connectMail, type Mailer } from './outside/mailer.ts';
+import { papers, type Papers } from './papers/papers.ts';
 import { startWorkers, type Workers } from './workers/pool.ts';
 
 /** What a request needs, built once and handed in. */
@@ -18,6 +19,7 @@ export interface Context {
   log: Logger;
   mailer: Mailer;
   files: FileStore;
+  papers: Papers;
   workers: Workers;
 }
 
@@ -34,6 +36,7 @@ export async function createContext(config: Config, clock: Clock = systemClock):
     log: pino({ level: config.logLevel, redact: ['req.headers.cookie', 'res.headers["set-cookie"]'] }),
     mailer: connectMail(config),
     files: new FileStore(path.join(config.dataDir, 'files')),
+    papers,
     workers: startWorkers(config),
   };
 }

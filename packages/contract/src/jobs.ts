@@ -1,1 +1,304 @@
-export {};
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { areaMm2, count, day, id, idParams, instant, optionalLine, page, pageQuery, paperNumber, positiveCount, version } from './fields.ts';
+import { layout } from './layouts.ts';
+import { awaited, orderState } from './orders.ts';
+
+export const jobStates = ['waiting', 'ready', 'at the bench', 'paused', 'finished'] as const;
+export const jobState = z.enum(jobStates);
+export type JobState = z.infer<typeof jobState>;
+
+export const stepPer = z.enum(['piece', 'strike', 'panel', 'strip', 'run']);
+
+/** A job in a list. */
+export const jobCard = z
+  .object({
+    id,
+    number: paperNumber,
+    state: jobState,
+    orderId: id,
+    title: z.string(),
+    customerName: z.string(),
+    quantity: count,
+    cutCount: count,
+    promisedOn: day,
+    inHandsOn: day.nullable(),
+    awaits: z.array(awaited),
+    plannedMinutes: z.string(),
+    loggedMinutes: z.string(),
+    /** Each step's share done, 0 to 1, in order: the stitches of the ticket. */
+    progress: z.array(z.number()),
+    /** The step under way or next; null when all are done. */
+    step: z.string().nullable(),
+    good: count,
+    seconds: count,
+  })
+  .meta({ id: 'JobCard' });
+export type JobCard = z.infer<typeof jobCard>;
+
+const jobStep = z
+  .object({
+    id,
+    position: count,
+    name: z.string(),
+    per: stepPer,
+    plannedMinutes: z.string(),
+    /** How many of what it is counted per can pass here, after the rejects of the steps before. */
+    limit: count,
+    good: count,
+    rejects: count,
+    seconds: count,
+    minutes: z.string(),
+    /** Nothing is left to log but a correction. */
+    done: z.boolean(),
+    /** A short caution for this kind of work. */
+    caution: z.object({ level: z.enum(['WARNING', 'CAUTION', 'NOTICE']), text: z.string() }).nullable(),
+  })
+  .meta({ id: 'JobStep' });
+export type JobStep = z.infer<typeof jobStep>;
+
+const jobTool = z
+  .object({ id, number: z.string(), kind: z.enum(['cutting die', 'stamp plate']), name: z.string(), slot: z.string(), lifeLeft: z.int() })
+  .meta({ id: 'JobTool' });
+export type JobTool = z.infer<typeof jobTool>;
+
+const jobLot = z
+  .object({
+    lotId: id,
+    tag: z.string(),
+    form: z.string(),
+    shade: z.string(),
+    place: z.string(),
+    /** Still held for this job. */
+    heldAreaMm2: z.string(),
+    /** On hand and held by nobody. */
+    freeAreaMm2: z.string(),
+    /** Taken for this job, less what came back. */
+    takenAreaMm2: z.string(),
+  })
+  .meta({ id: 'JobLot' });
+export type JobLot = z.infer<typeof jobLot>;
+
+const jobHardware = z
+  .object({ hardwareId: id, name: z.string(), needed: count, held: count, free: z.int(), taken: z.int() })
+  .meta({ id: 'JobHardware' });
+export type JobHardware = z.infer<typeof jobHardware>;
+
+const benchLog = z
+  .object({
+    id,
+    stepId: id,
+    stepName: z.string(),
+    good: z.int(),
+    rejects: z.int(),
+    seconds: z.int(),
+    minutes: z.string(),
+    note: z.string(),
+    at: instant,
+    personName: z.string(),
+  })
+  .meta({ id: 'BenchLog' });
+export type BenchLog = z.infer<typeof benchLog>;
+
+/** The ticket: all that the maker needs, and nothing that the maker must not see. */
+export const job = z
+  .object({
+    id,
+    number: paperNumber,
+    state: jobState,
+    orderId: id,
+    orderNumber: paperNumber,
+    orderState,
+    awaits: z.array(awaited),
+    title: z.string(),
+    customerName: z.string(),
+    patternId: id,
+    patternName: z.string(),
+    patternVersion: count,
+    leatherName: z.string(),
+    quantity: count,
+    cutCount: count,
+    containers: count,
+    layout,
+    /** SVG path data in mm; null for a hand count. */
+    outlinePath: z.string().nullable(),
+    neededAreaMm2: z.string(),
+    promisedOn: day,
+    inHandsOn: day.nullable(),
+    plannedMinutes: z.string(),
+    loggedMinutes: z.string(),
+    needsPlate: z.boolean(),
+    needsDie: z.boolean(),
+    plate: jobTool.nullable(),
+    die: jobTool.nullable(),
+    lots: z.array(jobLot),
+    hardware: z.array(jobHardware),
+    steps: z.array(jobStep),
+    logs: z.array(benchLog),
+    good: count,
+    seconds: count,
+    startedAt: instant.nullable(),
+    finishedAt: instant.nullable(),
+    version,
+  })
+  .meta({ id: 'Job' });
+export type Job = z.infer<typeof job>;
+
+/** Estimate and fact of one thing, as exact decimals in its unit. */
+const compared = z.object({
+  what: z.string(),
+  unit: z.enum(['mm2', 'pieces', 'minutes', 'percent', 'money']),
+  estimate: z.string(),
+  fact: z.string().nullable(),
+});
+export type Compared = z.infer<typeof compared>;
+
+export const jobComparison = z
+  .object({
+    work: z.array(compared),
+    /** What it cost and earned: for the owner. */
+    money: confidential(z.array(compared)),
+  })
+  .meta({ id: 'JobComparison' });
+export type JobComparison = z.infer<typeof jobComparison>;
+
+/** One day of the bench: what there is, and what open jobs will need of it, earliest promise first. */
+const benchDay = z
+  .object({
+    day,
+    minutes: z.string(),
+    planned: z.array(z.object({ jobId: id, number: paperNumber, title: z.string(), minutes: z.string() })),
+    /** Logged already on that day. */
+    loggedMinutes: z.string(),
+    freeMinutes: z.string(),
+    /** Jobs promised for that day. */
+    promised: z.array(z.object({ jobId: id, number: paperNumber, title: z.string() })),
+  })
+  .meta({ id: 'BenchDay' });
+export type BenchDay = z.infer<typeof benchDay>;
+
+export const benchHours = z
+  .object({
+    days: z.array(benchDay),
+    /** Jobs that cannot be done by their promised day at the shop's hours. */
+    late: z.array(z.object({ jobId: id, number: paperNumber, title: z.string(), promisedOn: day, minutesShort: z.string() })),
+  })
+  .meta({ id: 'BenchHours' });
+export type BenchHours = z.infer<typeof benchHours>;
+
+const bench = ['owner', 'maker'] as const;
+const someArea = areaMm2.refine((text) => Number(text) > 0, 'Enter an area above 0.');
+const signedCount = z.int('Enter a whole number.').min(-100_000, 'That is too many.').max(100_000, 'That is too many.');
+const signedMinutes = z
+  .string('Enter minutes, such as 12 or 7.5.')
+  .trim()
+  .regex(/^-?(0|[1-9]\d{0,4})(\.\d{1,2})?$/, 'Enter minutes, such as 12 or 7.5.')
+  .refine((text) => !/^-0(\.0+)?$/.test(text), 'Enter minutes, such as 12 or 7.5.')
+  .meta({ example: '12.5' });
+
+export const listJobs = endpoint({
+  method: 'GET',
+  path: '/jobs',
+  summary: 'Jobs, newest first',
+  access: bench,
+  query: pageQuery.extend({ state: jobState.optional(), open: z.enum(['true', 'false']).optional() }),
+  reply: page(jobCard),
+});
+
+export const readJob = endpoint({
+  method: 'GET',
+  path: '/jobs/{id}',
+  summary: 'One job: its ticket',
+  access: bench,
+  params: idParams,
+  reply: job,
+});
+
+export const logBench = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/logs',
+  summary: 'Log minutes and counts on a step; a correction is a further row with negative counts',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    stepId: id,
+    good: signedCount.default(0),
+    rejects: signedCount.default(0),
+    seconds: signedCount.default(0),
+    minutes: signedMinutes.default('0'),
+    note: optionalLine(200).default(''),
+  }),
+  reply: job,
+});
+
+export const takeForJob = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/takings',
+  summary: 'Take leather from a lot, or hardware, for the job',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: z.union([
+    z.strictObject({ lotId: id, areaMm2: someArea }),
+    z.strictObject({ hardwareId: id, quantity: positiveCount }),
+  ]),
+  reply: job,
+});
+
+export const finishJob = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/finish',
+  summary: 'Finish: good pieces and seconds, what is left goes back, the order is packed',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    good: positiveCount,
+    seconds: count.default(0),
+    leatherLeft: z.array(z.strictObject({ lotId: id, areaMm2 })).max(50).default([]),
+    hardwareLeft: z.array(z.strictObject({ hardwareId: id, quantity: positiveCount })).max(50).default([]),
+  }),
+  reply: job,
+});
+
+export const pauseJob = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/pauses',
+  summary: 'Lay the job aside',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: z.strictObject({}),
+  reply: job,
+});
+
+export const resumeJob = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/resumptions',
+  summary: 'Go on with a paused job',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: z.strictObject({}),
+  reply: job,
+});
+
+export const compareJob = endpoint({
+  method: 'GET',
+  path: '/jobs/{id}/comparison',
+  summary: 'Estimate and fact of a finished job, side by side',
+  access: bench,
+  params: idParams,
+  reply: jobComparison,
+});
+
+export const readBenchHours = endpoint({
+  method: 'GET',
+  path: '/bench-hours',
+  summary: 'The calendar of bench hours: each day’s hours and which job will need them',
+  access: bench,
+  query: z.strictObject({ days: z.coerce.number().int().min(1).max(60).default(14) }),
+  reply: benchHours,
+});

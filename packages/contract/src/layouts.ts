@@ -1,1 +1,170 @@
-export {};
+import { z } from 'zod';
+import { DomainError, InvalidInput, checkOutline } from '@hidewright/domain';
+import { endpoint } from './endpoint.ts';
+import { id, idParams, lengthMm, positiveCount } from './fields.ts';
+import { outlineOf } from './layout-asked.ts';
+
+/** A length within limits, with a sentence that names it. */
+function length(word: string, min: number, max: number) {
+  const sentence = `Enter the ${word}: ${min} to ${max} mm.`;
+  // What is below zero has had its sentence already.
+  return lengthMm.refine((text) => Number(text) < 0 || (Number(text) >= min && Number(text) <= max), sentence);
+}
+
+const side = (word: string) => length(word, 1, 5000);
+const cornerRadiusMm = length('corner radius', 0, 2500);
+
+/** The closed curve that the cutting die cuts, as its measures were typed. */
+export const outline = z
+  .discriminatedUnion(
+    'shape',
+    [
+      z.strictObject({ shape: z.literal('round'), diameterMm: side('diameter') }),
+      z.strictObject({
+        shape: z.literal('rectangle'),
+        widthMm: side('width'),
+        heightMm: side('height'),
+        cornerRadiusMm,
+      }),
+      z.strictObject({ shape: z.literal('oval'), widthMm: side('width'), heightMm: side('height') }),
+      z.strictObject({
+        shape: z.literal('tag'),
+        lengthMm: side('length'),
+        widthMm: side('width'),
+        neckLengthMm: side('neck length'),
+        neckWidthMm: side('neck width'),
+        cornerRadiusMm,
+      }),
+    ],
+    'Choose round, rectangle, oval or tag.',
+  )
+  .superRefine((typed, context) => {
+    try {
+      checkOutline(outlineOf(typed));
+    } catch (error) {
+      if (!(error instanceof DomainError)) throw error;
+      const path = error instanceof InvalidInput ? [error.field] : [];
+      context.addIssue({ code: 'custom', path, message: error.message });
+    }
+  });
+export type TypedOutline = z.infer<typeof outline>;
+
+const containerSide = (word: string) => length(word, 1, 20_000);
+
+/** What is cut from. */
+export const container = z.discriminatedUnion(
+  'form',
+  [
+    z.strictObject({
+      form: z.literal('panel'),
+      widthMm: containerSide('panel’s width'),
+      heightMm: containerSide('panel’s height'),
+    }),
+    z.strictObject({
+      form: z.literal('strip'),
+      widthMm: containerSide('strip’s width'),
+      lengthMm: containerSide('strip’s length'),
+    }),
+  ],
+  'Choose panel or strip.',
+);
+export type TypedContainer = z.infer<typeof container>;
+
+/** "I get 21 from 11 × 13 in". */
+export const handCount = z.strictObject({
+  pieces: positiveCount.max(20_000, 'Enter at most 20,000 pieces.'),
+  widthMm: containerSide('panel’s width'),
+  heightMm: containerSide('panel’s height'),
+});
+export type TypedHandCount = z.infer<typeof handCount>;
+
+/** The part of a pattern that says how many pieces leather gives. */
+export const layoutFields = {
+  /** Which of the two drives the layout, where both are there. */
+  layoutBy: z.enum(['outline', 'hand count'], 'Choose outline or hand count.'),
+  outline: outline.nullable(),
+  handCount: handCount.nullable(),
+  /** The panel or strip that the outline is laid on; a hand count brings its own panel. */
+  container: container.nullable(),
+  /** The least distance between two cuts. */
+  spacingMm: length('spacing', 0, 100),
+  /** The border of a panel or strip that stays unused. */
+  trimMm: length('trim', 0, 100),
+};
+
+type LayoutFields = z.infer<z.ZodObject<typeof layoutFields>>;
+
+/** Whichever drives the layout must be there. */
+export function refineLayoutFields(asked: LayoutFields, context: Pick<z.RefinementCtx, 'addIssue'>): void {
+  const refuse = (field: keyof LayoutFields, message: string) =>
+    context.addIssue({ code: 'custom', path: [field], message });
+  if (asked.layoutBy === 'hand count') {
+    if (asked.handCount === null) refuse('handCount', 'Enter how many pieces a panel gives, and its size.');
+    return;
+  }
+  if (asked.outline === null) refuse('outline', 'Draw the outline, or choose a hand count.');
+  if (asked.container === null) refuse('container', 'Choose the panel or strip that the pieces are cut from.');
+}
+
+export const layoutAsked = z.strictObject(layoutFields).superRefine(refineLayoutFields);
+export type LayoutAsked = z.infer<typeof layoutAsked>;
+
+const mm = z.number();
+const laidContainer = z.discriminatedUnion('form', [
+  z.object({ form: z.literal('panel'), widthMm: mm, heightMm: mm }),
+  z.object({ form: z.literal('strip'), widthMm: mm, lengthMm: mm.optional() }),
+]);
+
+/** How the pieces lie, as the domain works it out; geometry is in numbers, areas are exact text. */
+export const layout = z
+  .object({
+    by: z.enum(['rows', 'hand count']),
+    pieces: z.int().min(0),
+    placements: z.array(z.object({ x: mm, y: mm, rot: mm })),
+    pitchMm: mm.nullable(),
+    rowStepMm: mm.nullable(),
+    shiftMm: mm.nullable(),
+    rows: z.int().nullable(),
+    piecesPerRow: z.int().nullable(),
+    turned: z.enum(['none', 'every other row', 'every other piece']),
+    container: laidContainer,
+    containerAreaMm2: z.string(),
+    pieceAreaMm2: z.string().nullable(),
+    yieldPercent: z.string().nullable(),
+    areaPerPieceMm2: z.string().nullable(),
+    boundPieces: z.int().nullable(),
+    mmPerPiece: mm.nullable(),
+    period: z.object({ mm, pieces: z.int() }).nullable(),
+  })
+  .meta({ id: 'Layout' });
+export type LayoutReply = z.infer<typeof layout>;
+
+/** A layout that was worked out and is kept: the same input always finds the same one. */
+export const storedLayout = z
+  .object({
+    id,
+    layout,
+    /** The outline as SVG path data in mm, which each placement turns and moves; none for a hand count. */
+    outlinePath: z.string().nullable(),
+  })
+  .meta({ id: 'StoredLayout' });
+export type StoredLayoutReply = z.infer<typeof storedLayout>;
+
+export const workOutLayout = endpoint({
+  method: 'POST',
+  path: '/layouts',
+  summary: 'Work out how many pieces a panel or strip gives, and keep it',
+  access: ['owner'],
+  creates: true,
+  body: layoutAsked,
+  reply: storedLayout,
+});
+
+export const readLayout = endpoint({
+  method: 'GET',
+  path: '/layouts/{id}',
+  summary: 'A layout that was worked out',
+  access: ['owner', 'maker'],
+  params: idParams,
+  reply: storedLayout,
+});

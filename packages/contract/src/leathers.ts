@@ -5,13 +5,13 @@ import { id, idParams, line, optionalLine, ounces, page, pageQuery, unitPrice, v
 
 const typed = {
   name: line(80, 'Enter a name, such as Oak tan russet 5–6 oz.'),
-  tannage: optionalLine(60).default(''),
-  colour: optionalLine(60).default(''),
-  finish: optionalLine(60).default(''),
-  weightLowOz: ounces.nullable().default(null),
-  weightHighOz: ounces.nullable().default(null),
+  tannage: optionalLine(60),
+  colour: optionalLine(60),
+  finish: optionalLine(60),
+  weightLowOz: ounces.nullable(),
+  weightHighOz: ounces.nullable(),
   pricePerFt2: unitPrice,
-  supplierId: id.nullable().default(null),
+  supplierId: id.nullable(),
 };
 
 export const leather = z
@@ -57,7 +57,15 @@ export const addLeather = endpoint({
   summary: 'Add a leather',
   access: ['owner'],
   creates: true,
-  body: z.strictObject(typed),
+  body: z.strictObject({
+    ...typed,
+    tannage: typed.tannage.default(''),
+    colour: typed.colour.default(''),
+    finish: typed.finish.default(''),
+    weightLowOz: typed.weightLowOz.default(null),
+    weightHighOz: typed.weightHighOz.default(null),
+    supplierId: typed.supplierId.default(null),
+  }),
   reply: leather,
 });
 
@@ -68,6 +76,7 @@ export const changeLeather = endpoint({
   access: ['owner'],
   edits: true,
   params: idParams,
-  body: z.strictObject({ ...typed, active: z.boolean().default(true) }).partial(),
+  // No defaults here: what a change does not name must stay as it is.
+  body: z.strictObject({ ...typed, active: z.boolean() }).partial(),
   reply: leather,
 });

@@ -1,1 +1,94 @@
-export {};
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { id, idParams, line, optionalLine, page, pageQuery, version } from './fields.ts';
+
+/** The forms that leather comes in and becomes. */
+export const lotForms = [
+  'side',
+  'hide',
+  'back',
+  'bend',
+  'shoulder',
+  'double shoulder',
+  'belly',
+  'panel',
+  'strip',
+  'offcut',
+] as const;
+export type LotForm = (typeof lotForms)[number];
+
+const tag = line(30, 'Enter the tag, such as T-0012.');
+
+export const lot = z
+  .object({
+    id,
+    tag: z.string(),
+    leatherId: id,
+    leatherName: z.string(),
+    form: z.enum(lotForms),
+    /** As measured when it came, all panels of a bundle together. */
+    measuredAreaMm2: z.string(),
+    pieces: z.int(),
+    widthMm: z.string().nullable(),
+    heightMm: z.string().nullable(),
+    cost: confidential(z.string()),
+    grade: z.string(),
+    shade: z.string(),
+    place: z.string(),
+    supplierLot: z.string(),
+    receivedOn: z.string(),
+    purchaseOrderId: id.nullable(),
+    purchaseOrderNumber: z.string().nullable(),
+    onHandAreaMm2: z.string(),
+    reservedAreaMm2: z.string(),
+    freeAreaMm2: z.string(),
+    /** What is left of it, at cost. */
+    valueOnHand: confidential(z.string()),
+    version,
+  })
+  .meta({ id: 'Lot' });
+export type Lot = z.infer<typeof lot>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+
+export const listLots = endpoint({
+  method: 'GET',
+  path: '/lots',
+  summary: 'The lots on the rack, newest first',
+  access: everybody,
+  query: pageQuery.extend({
+    leatherId: z.coerce.number().int().positive().optional(),
+    /** Lots that are used up stay in the list unless only those on the rack are asked for. */
+    onRack: z.enum(['yes', 'no']).optional(),
+  }),
+  reply: page(lot),
+});
+
+export const readLot = endpoint({
+  method: 'GET',
+  path: '/lots/{id}',
+  summary: 'One lot',
+  access: everybody,
+  params: idParams,
+  reply: lot,
+});
+
+export const changeLot = endpoint({
+  method: 'PATCH',
+  path: '/lots/{id}',
+  summary: 'Correct a lot’s tag, or say where it lies and how it looks',
+  access: ['owner', 'maker'],
+  edits: true,
+  params: idParams,
+  body: z
+    .strictObject({
+      tag,
+      grade: optionalLine(30),
+      shade: optionalLine(30),
+      place: optionalLine(60),
+      supplierLot: optionalLine(60),
+    })
+    .partial(),
+  reply: lot,
+});

@@ -1,1 +1,180 @@
-export {};
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { count, day, id, idParams, instant, page, pageQuery, paperNumber, runQuantity, version } from './fields.ts';
+
+export const orderStates = [
+  'awaiting proof',
+  'awaiting deposit',
+  'awaiting tooling',
+  'taken on',
+  'in work',
+  'packed',
+  'part shipped',
+  'shipped',
+  'closed',
+  'cancelled',
+] as const;
+export const orderState = z.enum(orderStates);
+export type OrderState = z.infer<typeof orderState>;
+
+/** What can still be awaited after an order is taken on; several at once. */
+export const awaited = z.enum(['proof', 'deposit', 'tooling'], 'Choose proof, deposit or tooling.');
+export type Awaited = z.infer<typeof awaited>;
+
+/** One question of *Can we make it?*, answered from what is on hand and free. No prices in it. */
+const checkAnswer = z
+  .object({
+    about: z.enum(['leather', 'hardware', 'tooling', 'hours']),
+    /** What it is about: a leather, a kind of rivet, the cutting die, the bench. */
+    name: z.string(),
+    unit: z.enum(['mm2', 'pieces', 'uses', 'minutes']),
+    /** Exact decimals in the unit. */
+    needed: z.string(),
+    free: z.string(),
+    /** What is missing; "0" where there is enough. */
+    short: z.string(),
+    enough: z.boolean(),
+    /** The answer in words; where something is short, it says what to do. */
+    sentence: z.string(),
+  })
+  .meta({ id: 'CheckAnswer' });
+export type CheckAnswer = z.infer<typeof checkAnswer>;
+
+/** The area that would come from one lot. */
+const checkLot = z.object({ lotId: id, tag: z.string(), place: z.string(), freeAreaMm2: z.string(), takesAreaMm2: z.string() });
+
+export const runCheck = z
+  .object({
+    quantity: runQuantity,
+    /** The day by which it must be packed. */
+    by: day,
+    cutCount: count,
+    containers: count,
+    /** True when every answer has enough. */
+    yes: z.boolean(),
+    answers: z.array(checkAnswer),
+    lots: z.array(checkLot),
+    /** The first day by which the bench has the hours; null where none is free within a year. */
+    earliestDay: day.nullable(),
+  })
+  .meta({ id: 'RunCheck' });
+export type RunCheck = z.infer<typeof runCheck>;
+
+export const order = z
+  .object({
+    id,
+    number: paperNumber,
+    state: orderState,
+    /** What is still awaited. */
+    awaits: z.array(awaited),
+    quoteId: id,
+    quoteNumber: paperNumber,
+    customerId: id,
+    customerName: z.string(),
+    patternId: id,
+    patternName: z.string(),
+    title: z.string(),
+    quantity: count,
+    priceEach: confidential(z.string()),
+    goodsTotal: confidential(z.string()),
+    toolingCharge: confidential(z.string()),
+    total: confidential(z.string()),
+    inHandsOn: day.nullable(),
+    promisedOn: day,
+    takenOnAt: instant,
+    shippedOn: day.nullable(),
+    job: z.object({
+      id,
+      number: paperNumber,
+      state: z.enum(['waiting', 'ready', 'at the bench', 'paused', 'finished']),
+      cutCount: count,
+      good: count,
+      seconds: count,
+    }),
+    /** Its invoice, where one has been drafted or issued. */
+    invoice: confidential(z.object({ id, number: paperNumber.nullable(), state: z.string() }).nullable()),
+    version,
+  })
+  .meta({ id: 'Order' });
+export type Order = z.infer<typeof order>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+
+export const checkQuote = endpoint({
+  method: 'GET',
+  path: '/quotes/{id}/check',
+  summary: 'Can we make it? Leather, hardware, tooling and bench hours against what is free, by that day',
+  access: ['owner', 'maker'],
+  params: idParams,
+  query: z.strictObject({
+    quantity: z.coerce.number('Enter a quantity.').pipe(runQuantity).optional(),
+    by: day.optional(),
+  }),
+  reply: runCheck,
+});
+
+export const listOrders = endpoint({
+  method: 'GET',
+  path: '/orders',
+  summary: 'Orders, newest first',
+  access: everybody,
+  query: pageQuery.extend({
+    state: orderState.optional(),
+    /** Only those not yet shipped, closed or cancelled. */
+    open: z.enum(['true', 'false']).optional(),
+    customerId: z.coerce.number().int().positive().optional(),
+  }),
+  reply: page(order),
+});
+
+export const readOrder = endpoint({
+  method: 'GET',
+  path: '/orders/{id}',
+  summary: 'One order',
+  access: everybody,
+  params: idParams,
+  reply: order,
+});
+
+export const takeOnOrder = endpoint({
+  method: 'POST',
+  path: '/orders',
+  summary: 'Take on an agreed quote: makes the order, its job and its reservations at once',
+  access: ['owner'],
+  creates: true,
+  body: z.strictObject({
+    quoteId: id,
+    promisedOn: day,
+    awaits: z
+      .array(awaited)
+      .max(3)
+      .refine((all) => new Set(all).size === all.length, 'Name each thing that is awaited once.')
+      .default([]),
+    /** Take it on although something is short: what there is, is held. */
+    evenIfShort: z.boolean().default(false),
+  }),
+  reply: order,
+});
+
+export const recordArrival = endpoint({
+  method: 'POST',
+  path: '/orders/{id}/arrivals',
+  summary: 'The proof is approved, the deposit received, or the tooling is here',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({ what: awaited }),
+  reply: order,
+});
+
+export const shipOrder = endpoint({
+  method: 'POST',
+  path: '/orders/{id}/shipments',
+  summary: 'The packed order has left the shop',
+  access: ['owner', 'maker'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({ shippedOn: day }),
+  reply: order,
+});

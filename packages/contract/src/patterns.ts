@@ -1,1 +1,131 @@
-export {};
+import { z } from 'zod';
+import { endpoint } from './endpoint.ts';
+import { id, idParams, instant, line, page, pageQuery, positiveCount, version } from './fields.ts';
+import { layout, layoutFields, refineLayoutFields } from './layouts.ts';
+import { workPlan } from './work-plan.ts';
+
+const hardwareLine = z.strictObject({
+  hardwareId: id,
+  perPiece: positiveCount.max(1000, 'Enter at most 1,000 for each piece.'),
+});
+
+/** What a pattern is: its outline or hand count, leather, hardware and work. Each change is a new version. */
+export const patternDefinition = z
+  .strictObject({
+    ...layoutFields,
+    leatherId: z.int('Choose a leather.').positive('Choose a leather.'),
+    hardware: z.array(hardwareLine).max(40, 'Keep it to 40 lines of hardware.'),
+    work: workPlan,
+    needsDie: z.boolean(),
+    needsPlate: z.boolean(),
+  })
+  .superRefine((definition, context) => {
+    refineLayoutFields(definition, context);
+    definition.hardware.forEach(({ hardwareId }, at) => {
+      if (definition.hardware.findIndex((each) => each.hardwareId === hardwareId) === at) return;
+      context.addIssue({
+        code: 'custom',
+        path: ['hardware', at, 'hardwareId'],
+        message: 'This is listed already. Enter all of it on one line.',
+      });
+    });
+  })
+  .meta({ id: 'PatternDefinition' });
+export type PatternDefinition = z.infer<typeof patternDefinition>;
+
+const patternVersion = z.object({
+  number: z.int().positive(),
+  definition: patternDefinition,
+  createdAt: instant,
+  createdBy: z.string(),
+});
+
+/** A pattern as it is now, with the names that its definition points to. */
+export const pattern = z
+  .object({
+    id,
+    name: z.string(),
+    active: z.boolean(),
+    /** Which version of the definition this is; quotes keep theirs. */
+    versionNumber: z.int().positive(),
+    definition: patternDefinition,
+    leatherName: z.string(),
+    hardware: z.array(z.object({ hardwareId: id, name: z.string(), perPiece: z.int() })),
+    /** "round, 95 mm" or "21 from a panel". */
+    description: z.string(),
+    /** SVG path data in mm; none where the pattern has no drawing. */
+    outlinePath: z.string().nullable(),
+    layout,
+    changedAt: instant,
+    changedBy: z.string(),
+    version,
+  })
+  .meta({ id: 'Pattern' });
+export type Pattern = z.infer<typeof pattern>;
+
+export const patternSummary = z.object({
+  id,
+  name: z.string(),
+  active: z.boolean(),
+  versionNumber: z.int().positive(),
+  description: z.string(),
+  leatherName: z.string(),
+  outlinePath: z.string().nullable(),
+  /** Pieces from one panel or strip; unknown until the layout is worked out again. */
+  pieces: z.int().nullable(),
+  yieldPercent: z.string().nullable(),
+  form: z.enum(['panel', 'strip']),
+  changedAt: instant,
+});
+export type PatternSummary = z.infer<typeof patternSummary>;
+
+const name = line(80, 'Enter a name, such as Round coaster.');
+const readers = ['owner', 'maker'] as const;
+
+export const listPatterns = endpoint({
+  method: 'GET',
+  path: '/patterns',
+  summary: 'What the shop makes',
+  access: readers,
+  query: pageQuery.extend({ active: z.enum(['yes', 'no']).optional() }),
+  reply: page(patternSummary),
+});
+
+export const readPattern = endpoint({
+  method: 'GET',
+  path: '/patterns/{id}',
+  summary: 'A pattern as it is now',
+  access: readers,
+  params: idParams,
+  reply: pattern,
+});
+
+export const listPatternVersions = endpoint({
+  method: 'GET',
+  path: '/patterns/{id}/versions',
+  summary: 'How a pattern was designed before, newest first',
+  access: readers,
+  params: idParams,
+  reply: z.object({ items: z.array(patternVersion) }),
+});
+
+export const addPattern = endpoint({
+  method: 'POST',
+  path: '/patterns',
+  summary: 'Add a pattern',
+  access: ['owner'],
+  creates: true,
+  body: z.strictObject({ name, definition: patternDefinition }),
+  reply: pattern,
+});
+
+export const changePattern = endpoint({
+  method: 'PATCH',
+  path: '/patterns/{id}',
+  summary: 'Change a pattern; another definition becomes a new version',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject({ name, definition: patternDefinition, active: z.boolean() }).partial(),
+  reply: pattern,
+});

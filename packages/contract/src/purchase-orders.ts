@@ -1,1 +1,150 @@
-export {};
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import {
+  areaMm2,
+  day,
+  id,
+  idParams,
+  line,
+  page,
+  pageQuery,
+  paperNumber,
+  paragraph,
+  positiveCount,
+  unitPrice,
+  version,
+} from './fields.ts';
+
+export const purchaseOrderStates = ['draft', 'sent', 'part received', 'received', 'cancelled'] as const;
+export type PurchaseOrderState = (typeof purchaseOrderStates)[number];
+
+const orderedArea = areaMm2.refine((text) => Number(text) > 0, 'Enter an area above zero.');
+
+const typedLine = z.discriminatedUnion(
+  'of',
+  [
+    z.strictObject({ of: z.literal('leather'), leatherId: id, areaMm2: orderedArea, unitPrice }),
+    z.strictObject({ of: z.literal('hardware'), hardwareId: id, quantity: positiveCount, unitPrice }),
+  ],
+  'Choose a leather, or hardware.',
+);
+export type PurchaseLineTyped = z.output<typeof typedLine>;
+
+const typed = {
+  supplierId: id,
+  expectedOn: day.nullable().default(null),
+  note: paragraph(2000).default(''),
+  lines: z
+    .array(typedLine)
+    .min(1, 'Add a line: what do you order?')
+    .max(100, 'An order holds at most 100 lines. Make a second one.'),
+};
+
+export const purchaseLine = z
+  .object({
+    id,
+    position: z.int(),
+    of: z.enum(['leather', 'hardware']),
+    leatherId: id.nullable(),
+    hardwareId: id.nullable(),
+    name: z.string(),
+    /** Of leather: what was ordered and what came. */
+    areaMm2: z.string().nullable(),
+    receivedAreaMm2: z.string().nullable(),
+    /** Of hardware: what was ordered and what came. */
+    quantity: z.int().nullable(),
+    received: z.int().nullable(),
+    /** Per ft², or per piece. */
+    unitPrice: confidential(z.string()),
+    amount: confidential(z.string()),
+  })
+  .meta({ id: 'PurchaseLine' });
+export type PurchaseLine = z.infer<typeof purchaseLine>;
+
+export const purchaseOrder = z
+  .object({
+    id,
+    number: paperNumber,
+    supplierId: id,
+    supplierName: z.string(),
+    supplierEmail: z.string(),
+    state: z.enum(purchaseOrderStates),
+    createdAt: z.string(),
+    sentAt: z.string().nullable(),
+    expectedOn: z.string().nullable(),
+    note: z.string(),
+    lines: z.array(purchaseLine),
+    total: confidential(z.string()),
+    version,
+  })
+  .meta({ id: 'PurchaseOrder' });
+export type PurchaseOrder = z.infer<typeof purchaseOrder>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+
+export const listPurchaseOrders = endpoint({
+  method: 'GET',
+  path: '/purchase-orders',
+  summary: 'Orders to suppliers, newest first',
+  access: everybody,
+  query: pageQuery.extend({
+    state: z.enum(purchaseOrderStates).optional(),
+    supplierId: z.coerce.number().int().positive().optional(),
+    /** Sent, and not all of it here. */
+    awaited: z.enum(['yes']).optional(),
+  }),
+  reply: page(purchaseOrder),
+});
+
+export const readPurchaseOrder = endpoint({
+  method: 'GET',
+  path: '/purchase-orders/{id}',
+  summary: 'One order to a supplier',
+  access: everybody,
+  params: idParams,
+  reply: purchaseOrder,
+});
+
+export const addPurchaseOrder = endpoint({
+  method: 'POST',
+  path: '/purchase-orders',
+  summary: 'Draft an order to a supplier',
+  access: ['owner'],
+  creates: true,
+  body: z.strictObject(typed),
+  reply: purchaseOrder,
+});
+
+export const changePurchaseOrder = endpoint({
+  method: 'PATCH',
+  path: '/purchase-orders/{id}',
+  summary: 'Change an order that is still a draft; lines are given whole',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject(typed).partial(),
+  reply: purchaseOrder,
+});
+
+export const sendPurchaseOrder = endpoint({
+  method: 'POST',
+  path: '/purchase-orders/{id}/sendings',
+  summary: 'Send an order to its supplier by e-mail, or say that it was handed over otherwise',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({ by: z.enum(['mail', 'hand'], 'Choose by e-mail or by hand.') }),
+  reply: purchaseOrder,
+});
+
+export const cancelPurchaseOrder = endpoint({
+  method: 'POST',
+  path: '/purchase-orders/{id}/cancellations',
+  summary: 'Cancel an order of which nothing has come',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({ reason: line(200, 'Say why, in a few words.') }),
+  reply: purchaseOrder,
+});

@@ -1,1 +1,306 @@
-export {};
+import type { RunInput, RunNumbers } from '@hidewright/domain';
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { domainRecord } from './domain-record.ts';
+import { endpoint } from './endpoint.ts';
+import {
+  day,
+  id,
+  idParams,
+  instant,
+  line,
+  money,
+  optionalLine,
+  page,
+  pageQuery,
+  paperNumber,
+  paragraph,
+  percent,
+  runQuantity,
+  unitPrice,
+  version,
+} from './fields.ts';
+import { layout } from './layouts.ts';
+
+export const quoteStates = ['draft', 'sent', 'agreed', 'declined', 'superseded', 'lapsed'] as const;
+export const quoteState = z.enum(quoteStates);
+export type QuoteState = z.infer<typeof quoteState>;
+
+/** How a customer can say yes other than by the link. */
+export const agreedByWord = z.enum(['phone', 'mail', 'counter'], 'Choose how it was agreed: phone, mail or counter.');
+
+const breaks = z
+  .array(
+    z.strictObject({
+      quantity: runQuantity,
+      /** The owner's own price each; null leaves the price that is worked out. */
+      typedPrice: unitPrice.nullable().default(null),
+    }),
+    'Enter at least one quantity.',
+  )
+  .min(1, 'Enter at least one quantity.')
+  .max(8, 'Keep it to 8 quantities.')
+  .superRefine((rungs, context) => {
+    const seen = new Set<number>();
+    rungs.forEach(({ quantity }, at) => {
+      if (seen.has(quantity)) {
+        context.addIssue({ code: 'custom', path: [at, 'quantity'], message: `${quantity} is there already. Enter each quantity once.` });
+      }
+      seen.add(quantity);
+    });
+  });
+
+const tooling = z
+  .array(
+    z.strictObject({
+      name: line(80, 'Say which tool, such as Stamp plate.'),
+      /** What the shop pays for it. */
+      cost: money,
+      /** What the customer pays for it, as a line of its own. */
+      charge: money,
+    }),
+  )
+  .max(8, 'Keep it to 8 tools.');
+
+/** What a person says about a quote; everything else is worked out from the pattern and the shop's values. */
+export const quoteBody = z
+  .strictObject({
+    customerId: id,
+    patternId: id,
+    /** What the customer calls it; the pattern's name where it is empty. */
+    title: optionalLine(80).default(''),
+    inHandsOn: day.nullable().default(null),
+    breaks,
+    tooling: tooling.default([]),
+    message: paragraph(2000).default(''),
+    overrides: z
+      .strictObject({
+        rejectPercent: percent.optional(),
+        leatherPricePerFt2: unitPrice.optional(),
+      })
+      .default({}),
+  })
+  .meta({ id: 'QuoteBody' });
+export type QuoteBody = z.output<typeof quoteBody>;
+
+const letter = z.object({
+  state: z.enum(['waiting', 'sent', 'failed']),
+  recipient: confidential(z.string()),
+  sentAt: instant.nullable(),
+  /** Why the last try did not work. */
+  lastError: z.string().nullable(),
+});
+
+const rung = z.object({
+  quantity: runQuantity,
+  typedPrice: confidential(z.string().nullable()),
+  priceEach: confidential(z.string()),
+  /** The pieces alone. */
+  goodsTotal: confidential(z.string()),
+  /** Pieces and tooling. */
+  total: confidential(z.string()),
+});
+
+const heading = {
+  id,
+  number: paperNumber,
+  revision: z.int().positive(),
+  state: quoteState,
+  customerId: id,
+  customerName: z.string(),
+  patternId: id,
+  patternName: z.string(),
+  title: z.string(),
+  inHandsOn: day.nullable(),
+  validUntil: day.nullable(),
+  createdAt: instant,
+  sentAt: instant.nullable(),
+  agreedAt: instant.nullable(),
+  agreedQuantity: runQuantity.nullable(),
+  agreedHow: z.enum(['link', 'phone', 'mail', 'counter']).nullable(),
+  /** The order that the shop has taken on from it. */
+  orderId: id.nullable(),
+  orderNumber: paperNumber.nullable(),
+};
+
+export const quote = z
+  .object({
+    ...heading,
+    patternVersion: z.int().positive(),
+    layoutId: id,
+    layout,
+    /** SVG path data in mm; null where there is no drawing. */
+    outlinePath: z.string().nullable(),
+    breaks: z.array(rung),
+    tooling: z.array(z.object({ name: z.string(), cost: confidential(z.string()), charge: confidential(z.string()) })),
+    overrides: z.object({ rejectPercent: z.string().optional(), leatherPricePerFt2: confidential(z.string()) }),
+    message: confidential(z.string()),
+    /** The snapshot it is priced from, whole. */
+    input: confidential(domainRecord<RunInput>('RunInput')),
+    numbers: confidential(domainRecord<RunNumbers>('RunNumbers')),
+    /** Whether the customer has an e-mail address. */
+    canMail: z.boolean(),
+    letter: letter.nullable(),
+    /** The link that is open for the customer now. */
+    link: z.object({ expiresAt: instant }).nullable(),
+    /** Other revisions of the same number, newest first. */
+    revisions: z.array(z.object({ id, revision: z.int().positive(), state: quoteState })),
+    version,
+  })
+  .meta({ id: 'Quote' });
+export type Quote = z.infer<typeof quote>;
+
+/** A quote as it stands in a list. */
+export const quoteRow = z
+  .object({
+    ...heading,
+    quantities: z.array(runQuantity),
+    /** What the agreed quantity, or else the largest, comes to with its tooling. */
+    total: confidential(z.string()),
+  })
+  .meta({ id: 'QuoteRow' });
+export type QuoteRow = z.infer<typeof quoteRow>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+
+export const listQuotes = endpoint({
+  method: 'GET',
+  path: '/quotes',
+  summary: 'The quotes, newest first',
+  access: everybody,
+  query: pageQuery.extend({ state: quoteState.optional(), customerId: z.coerce.number().int().positive().optional() }),
+  reply: page(quoteRow),
+});
+
+export const readQuote = endpoint({
+  method: 'GET',
+  path: '/quotes/{id}',
+  summary: 'One quote',
+  access: everybody,
+  params: idParams,
+  reply: quote,
+});
+
+/** What the browser prices from, with the same domain function, while a quote is being typed. */
+export const runBasis = z
+  .object({
+    patternId: id,
+    patternName: z.string(),
+    patternVersion: z.int().positive(),
+    layout,
+    outlinePath: z.string().nullable(),
+    needsDie: z.boolean(),
+    needsPlate: z.boolean(),
+    /** Complete but for what is typed on the quote: its breaks are an example, its tooling is empty. */
+    input: domainRecord<RunInput>('RunInput'),
+    mailAvailable: z.boolean(),
+  })
+  .meta({ id: 'RunBasis' });
+export type RunBasis = z.infer<typeof runBasis>;
+
+export const readRunBasis = endpoint({
+  method: 'GET',
+  path: '/patterns/{id}/run-basis',
+  summary: 'What a run of a pattern is priced from today',
+  access: ['owner'],
+  params: idParams,
+  reply: runBasis,
+});
+
+export const createQuote = endpoint({
+  method: 'POST',
+  path: '/quotes',
+  summary: 'Draft a quote',
+  access: ['owner'],
+  creates: true,
+  body: quoteBody,
+  reply: quote,
+});
+
+export const changeQuote = endpoint({
+  method: 'PUT',
+  path: '/quotes/{id}',
+  summary: 'Work a draft out again from what is typed now',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: quoteBody,
+  reply: quote,
+});
+
+/** A link is told once, to who made it: only its hash is kept, so no reply that holds one is kept for replay either. */
+const handedOver = z.object({
+  quote,
+  linkUrl: z.string(),
+  /** To copy into whatever reaches the customer. */
+  text: z.string(),
+});
+
+export const sendQuote = endpoint({
+  method: 'POST',
+  path: '/quotes/{id}/sendings',
+  summary: 'Send a draft: by mail, or by hand as a link and text to copy',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject({ by: z.enum(['mail', 'hand'], 'Choose how it goes out: mail or hand.') }),
+  reply: handedOver.meta({ id: 'SentQuote' }),
+});
+
+export const renewLink = endpoint({
+  method: 'POST',
+  path: '/quotes/{id}/links',
+  summary: 'A new link for the customer; the one before stops working',
+  access: ['owner'],
+  params: idParams,
+  reply: handedOver,
+});
+
+export const revokeLink = endpoint({
+  method: 'DELETE',
+  path: '/quotes/{id}/links',
+  summary: 'Stop the customer’s link',
+  access: ['owner'],
+  params: idParams,
+  reply: quote,
+});
+
+export const agreeQuote = endpoint({
+  method: 'POST',
+  path: '/quotes/{id}/agreements',
+  summary: 'Note that the customer agreed, by phone, mail or at the counter',
+  access: ['owner'],
+  params: idParams,
+  body: z.strictObject({ quantity: runQuantity, how: agreedByWord }),
+  reply: quote,
+});
+
+export const declineQuote = endpoint({
+  method: 'POST',
+  path: '/quotes/{id}/refusals',
+  summary: 'Note that the customer declined',
+  access: ['owner'],
+  params: idParams,
+  body: z.strictObject({ reason: optionalLine(200).default('') }),
+  reply: quote,
+});
+
+export const reviseQuote = endpoint({
+  method: 'POST',
+  path: '/quotes/{id}/revisions',
+  summary: 'A new draft under the same number',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  reply: quote,
+});
+
+export const quotePaper = endpoint({
+  method: 'GET',
+  path: '/quotes/{id}/paper',
+  summary: 'The quote as PDF, as the customer gets it',
+  access: ['owner', 'bookkeeper'],
+  params: idParams,
+  reply: z.unknown(),
+  file: 'application/pdf',
+});

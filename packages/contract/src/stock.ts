@@ -1,1 +1,148 @@
-export {};
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import {
+  areaMm2,
+  count,
+  day,
+  id,
+  lengthMm,
+  line,
+  money,
+  optionalLine,
+  page,
+  pageQuery,
+  positiveCount,
+} from './fields.ts';
+import { hardware } from './hardware.ts';
+import { lot, lotForms } from './lots.ts';
+import { purchaseOrder } from './purchase-orders.ts';
+
+export const movementKinds = ['receive', 'take', 'return', 'reject', 'adjust', 'count'] as const;
+export type MovementKind = (typeof movementKinds)[number];
+
+/** Whose stock: of a lot an area, of hardware a count. */
+const itemFields = {
+  lotId: id.nullable(),
+  lotTag: z.string().nullable(),
+  hardwareId: id.nullable(),
+  hardwareName: z.string().nullable(),
+  areaMm2: z.string().nullable(),
+  quantity: z.int().nullable(),
+};
+
+export const stockMovement = z
+  .object({
+    id,
+    at: z.string(),
+    day: z.string(),
+    kind: z.enum(movementKinds),
+    ...itemFields,
+    /** Signed like the movement, at cost. */
+    value: confidential(z.string()),
+    jobNumber: z.string().nullable(),
+    purchaseOrderNumber: z.string().nullable(),
+    reason: z.string(),
+    actorName: z.string(),
+  })
+  .meta({ id: 'StockMovement' });
+export type StockMovement = z.infer<typeof stockMovement>;
+
+export const stockReservation = z
+  .object({ id, jobId: id, jobNumber: z.string(), ...itemFields })
+  .meta({ id: 'StockReservation' });
+export type StockReservation = z.infer<typeof stockReservation>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+const idQuery = z.coerce.number().int().positive().optional();
+
+export const listStockMovements = endpoint({
+  method: 'GET',
+  path: '/stock-movements',
+  summary: 'The stock ledger, newest first: of everything, one lot or one hardware',
+  access: everybody,
+  query: pageQuery.omit({ q: true }).extend({ lotId: idQuery, hardwareId: idQuery }),
+  reply: page(stockMovement),
+});
+
+export const listReservations = endpoint({
+  method: 'GET',
+  path: '/reservations',
+  summary: 'What is held for jobs',
+  access: everybody,
+  query: pageQuery.omit({ q: true }).extend({ lotId: idQuery, hardwareId: idQuery, jobId: idQuery }),
+  reply: page(stockReservation),
+});
+
+const aboveZero = (text: string) => Number(text) > 0;
+const side = lengthMm.refine(aboveZero, 'Enter a length above zero, or leave it empty.');
+
+const receivedLot = z.strictObject({
+  leatherId: id,
+  purchaseLineId: id.nullable().default(null),
+  /** Left empty, the next number is drawn. */
+  tag: optionalLine(30).default(''),
+  form: z.enum(lotForms, 'Choose the form that it came in.'),
+  measuredAreaMm2: areaMm2.refine(aboveZero, 'Enter the area as measured, above zero.'),
+  pieces: positiveCount.max(10_000, 'A bundle holds at most 10,000 pieces.').default(1),
+  widthMm: side.nullable().default(null),
+  heightMm: side.nullable().default(null),
+  /** The owner may type what it cost; otherwise the order's or the leather's price per ft² says it. */
+  cost: money.nullable().default(null),
+  grade: optionalLine(30).default(''),
+  shade: optionalLine(30).default(''),
+  place: optionalLine(60).default(''),
+  supplierLot: optionalLine(60).default(''),
+});
+export type ReceivedLot = z.output<typeof receivedLot>;
+
+const receivedHardware = z.strictObject({
+  hardwareId: id,
+  purchaseLineId: id.nullable().default(null),
+  quantity: positiveCount,
+  cost: money.nullable().default(null),
+});
+export type ReceivedHardware = z.output<typeof receivedHardware>;
+
+const tooMany = 'Receive at most 200 lines at a time.';
+
+export const receiveDelivery = endpoint({
+  method: 'POST',
+  path: '/receipts',
+  summary: 'Receive a delivery, for an order to a supplier or without one',
+  access: ['owner', 'maker'],
+  creates: true,
+  body: z.strictObject({
+    purchaseOrderId: id.nullable().default(null),
+    receivedOn: day.optional(),
+    lots: z.array(receivedLot).max(200, tooMany).default([]),
+    hardware: z.array(receivedHardware).max(200, tooMany).default([]),
+    /** What is still open of the order will not come. */
+    nothingMore: z.boolean().default(false),
+  }),
+  reply: z.object({ lots: z.array(lot), hardware: z.array(hardware), purchaseOrder: purchaseOrder.nullable() }),
+});
+
+const reason = line(200, 'Say why, in a few words, such as counted on the shelf.');
+
+export const adjustStock = endpoint({
+  method: 'POST',
+  path: '/adjustments',
+  summary: 'Set what is on hand to what was measured or counted',
+  access: ['owner', 'maker'],
+  creates: true,
+  body: z.discriminatedUnion(
+    'of',
+    [
+      z.strictObject({ of: z.literal('lot'), lotId: id, areaMm2, reason }),
+      z.strictObject({ of: z.literal('hardware'), hardwareId: id, counted: count, reason }),
+    ],
+    'Choose a lot, or hardware.',
+  ),
+  reply: z.object({
+    /** Nothing, where the books agreed with the rack. */
+    movement: stockMovement.nullable(),
+    /** What is held for jobs and no longer all there. */
+    broken: z.array(stockReservation),
+  }),
+});

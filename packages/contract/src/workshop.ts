@@ -1,1 +1,93 @@
-export {};
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { count, lengthMm, line, money, optionalLine, paragraph, percent, version } from './fields.ts';
+
+const hoursPerDay = z
+  .string()
+  .regex(/^(1?\d|2[0-4])(\.\d{1,2})?$/, 'Enter hours from 0 to 24, such as 6 or 7.5.')
+  .refine((text) => Number(text) <= 24, 'Enter hours from 0 to 24, such as 6 or 7.5.');
+
+const timeZone = z.string().refine(isTimeZone, 'Choose a time zone, such as Europe/Lisbon.');
+
+function isTimeZone(name: string): boolean {
+  try {
+    return new Intl.DateTimeFormat('en', { timeZone: name }).resolvedOptions().timeZone !== '';
+  } catch {
+    return false;
+  }
+}
+
+const settings = {
+  name: line(80, 'Enter the name of the shop.'),
+  currency: z.string().regex(/^[A-Z]{3}$/, 'Choose a currency.'),
+  areaUnit: z.enum(['ft2', 'dm2', 'm2']),
+  lengthUnit: z.enum(['mm', 'in']),
+  timeZone,
+  targetPerHour: money,
+  wagePerHour: money,
+  deskMinutesPerOrder: count.max(10_000, 'Enter at most 10,000 minutes.'),
+  packingPerOrder: money,
+  rejectPercent: percent.refine((text) => Number(text) < 99, 'Enter less than 99 %.'),
+  confidencePercent: percent.refine(
+    (text) => Number(text) >= 50 && Number(text) < 100,
+    'Enter a share from 50 to below 100 %.',
+  ),
+  priceStep: money.refine((text) => Number(text) > 0, 'Enter a step above 0, such as 0.05.'),
+  benchHoursPerDay: hoursPerDay,
+  spacingMm: lengthMm,
+  trimMm: lengthMm,
+  depositPercent: percent,
+  quoteValidDays: count.min(1, 'Enter 1 day or more.').max(730, 'Enter at most 730 days.'),
+  paymentTermDays: count.max(365, 'Enter at most 365 days.'),
+  address: paragraph(400),
+  taxNumber: optionalLine(40),
+};
+
+export const workshop = z
+  .object({
+    name: z.string(),
+    currency: z.string(),
+    areaUnit: settings.areaUnit,
+    lengthUnit: settings.lengthUnit,
+    timeZone: z.string(),
+    targetPerHour: confidential(z.string()),
+    wagePerHour: confidential(z.string()),
+    deskMinutesPerOrder: z.int(),
+    packingPerOrder: confidential(z.string()),
+    rejectPercent: z.string(),
+    confidencePercent: z.string(),
+    priceStep: confidential(z.string()),
+    benchHoursPerDay: z.string(),
+    spacingMm: z.string(),
+    trimMm: z.string(),
+    depositPercent: confidential(z.string()),
+    quoteValidDays: z.int(),
+    paymentTermDays: z.int(),
+    address: z.string(),
+    taxNumber: confidential(z.string()),
+    mode: z.enum(['demo', 'shop']),
+    /** Whether mail can leave; papers are handed over by hand while it cannot. */
+    mailAvailable: z.boolean(),
+    version,
+  })
+  .meta({ id: 'Workshop' });
+export type Workshop = z.infer<typeof workshop>;
+
+export const readWorkshop = endpoint({
+  method: 'GET',
+  path: '/workshop',
+  summary: 'The shop and its starting values',
+  access: ['owner', 'maker', 'bookkeeper'],
+  reply: workshop,
+});
+
+export const changeWorkshop = endpoint({
+  method: 'PATCH',
+  path: '/workshop',
+  summary: 'Change the shop’s starting values',
+  access: ['owner'],
+  edits: true,
+  body: z.strictObject(settings).partial(),
+  reply: workshop,
+});

@@ -11,6 +11,8 @@ export interface Asked<E extends Endpoint> {
   body: BodyOf<E>;
   /** The version named by If-Match; 0 where the endpoint edits nothing. */
   ifMatch: number;
+  /** The address under which the caller reached us, as it was said: good for the words of a link, never for a decision. */
+  origin: string;
 }
 
 /** @throws {Problem} when the request is not what the endpoint takes */
@@ -20,6 +22,7 @@ export function readAsked<E extends Endpoint>(endpoint: E, request: Request): As
     query: read(endpoint.query, request.query, false) as QueryOf<E>,
     body: readBody(endpoint, request) as BodyOf<E>,
     ifMatch: endpoint.edits === true ? readIfMatch(request.get('If-Match')) : 0,
+    origin: `${request.protocol}://${request.get('Host') ?? 'localhost'}`,
   };
 }
 

@@ -14,7 +14,9 @@ interface Listening {
 export async function listen(app: Express, config: Config): Promise<Listening> {
   const server = await serverFor(app, config);
   await new Promise<void>((resolve, reject) => {
-    server.once('error', reject);
+    server.once('error', (error) => {
+      reject(inUse(error) ? new Error(`Port ${config.port} is in use. Stop what uses it, or set PORT to another one.`) : error);
+    });
     server.listen(config.port, config.host, resolve);
   });
   return { port: (server.address() as AddressInfo).port, close: () => closed(server) };
@@ -35,3 +37,5 @@ function closed(server: http.Server): Promise<void> {
     server.closeIdleConnections();
   });
 }
+
+const inUse = (error: Error) => 'code' in error && error.code === 'EADDRINUSE';

@@ -6,6 +6,8 @@ export interface Letter {
   to: string;
   subject: string;
   text: string;
+  /** The same for each try to send the same mail. */
+  messageId: string;
   attachments: { filename: string; contentType: string; content: Buffer }[];
 }
 

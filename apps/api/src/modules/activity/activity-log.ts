@@ -31,7 +31,7 @@ export function activityHash(row: Covered): string {
 
 /** Writes who did what, in the transaction that does it. */
 export async function logDeed(work: Work, deed: Deed): Promise<void> {
-  const last = await work.em.findOne(Activity, {}, { orderBy: { seq: 'desc' } });
+  const last = await work.em.findOne(Activity, { seq: { $gt: 0 } }, { orderBy: { seq: 'desc' } });
   const row = {
     seq: (last?.seq ?? 0) + 1,
     at: work.now.toISOString(),

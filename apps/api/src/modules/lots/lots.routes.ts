@@ -1,6 +1,42 @@
 import { Router } from 'express';
+import { changeLot, listLots, readLot } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { assignDefined } from '../../db/assign-defined.ts';
+import { requireVersion } from '../../http/conditions.ts';
+import { readCursor, toPage } from '../../http/paging.ts';
+import { notFound } from '../../http/problem.ts';
+import { serve } from '../../http/serve.ts';
+import { logDeed } from '../activity/activity-log.ts';
+import { requireFreeTag } from './lot-tags.ts';
+import { Lot } from './lot.entity.ts';
+import { readLotList, readOneLot } from './read-lots.ts';
 
-export function lotRoutes(_context: Context): Router {
-  return Router();
+export function lotRoutes(context: Context): Router {
+  const router = Router();
+
+  serve(router, context, listLots, async ({ em }, { query }) => {
+    const { cursor, limit, ...filters } = query;
+    const rows = await readLotList(em, { ...filters, below: readCursor(cursor), limit: limit + 1 });
+    return toPage(rows, limit, (row) => row.id);
+  });
+
+  serve(router, context, readLot, async ({ em }, { params }) => readOneLot(em, params.id));
+
+  serve(router, context, changeLot, async (work, { params, body, ifMatch }) => {
+    const lot = await work.em.findOne(Lot, params.id);
+    if (lot === null) throw notFound('lot');
+    await requireVersion(work.em, { kind: 'lot', id: lot.id, version: lot.version }, ifMatch);
+    if (body.tag !== undefined) await requireFreeTag(work.em, body.tag, 'tag', lot.id);
+    assignDefined(lot, body);
+    await work.em.flush();
+    await logDeed(work, {
+      action: `changed lot ${lot.tag}`,
+      subjectKind: 'lot',
+      subjectId: lot.id,
+      detail: { changed: Object.keys(body) },
+    });
+    return readOneLot(work.em, lot.id);
+  });
+
+  return router;
 }

@@ -8,11 +8,10 @@ import { Workshop } from '../workshop/workshop.entity.ts';
 export async function describeSession(context: Context, person: Express.User | undefined): Promise<Session> {
   const em = context.orm.em.fork();
   const workshop = await em.findOne(Workshop, 1);
-  const someone = await em.findOne(Person, {}, { fields: ['id'], orderBy: { id: 'asc' } });
   return {
     person: person === undefined ? null : { name: person.name, email: person.email, role: person.role },
     mode: context.config.mode,
-    firstRun: someone === null,
+    firstRun: (await em.count(Person)) === 0,
     workshop: workshop === null ? null : inWords(workshop, context),
     mailboxUrl: context.config.mailboxUrl ?? null,
   };

@@ -13,7 +13,7 @@ export function systemRoutes(context: Context): Router {
     return { status: 'ok' as const };
   });
 
-  serve(router, context, readOpenApi, () => Promise.resolve({ ...(document ??= openApiDocument()) }));
+  serve(router, context, readOpenApi, () => Promise.resolve((document ??= openApiDocument())));
 
   return router;
 }

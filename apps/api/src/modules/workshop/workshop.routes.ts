@@ -1,6 +1,95 @@
 import { Router } from 'express';
+import { Decimal } from 'decimal.js';
+import { changeWorkshop, readWorkshop, type BodyOf, type Workshop as WorkshopReply } from '@hidewright/contract';
+import { currencies } from '@hidewright/domain';
 import type { Context } from '../../context.ts';
+import { assignDefined } from '../../db/assign-defined.ts';
+import { requireVersion } from '../../http/conditions.ts';
+import { moneyText } from '../../http/decimal-text.ts';
+import { invalid } from '../../http/problem.ts';
+import { serve } from '../../http/serve.ts';
+import { logDeed } from '../activity/activity-log.ts';
+import { Workshop } from './workshop.entity.ts';
 
-export function workshopRoutes(_context: Context): Router {
-  return Router();
+export function workshopRoutes(context: Context): Router {
+  const router = Router();
+  const { available: mailAvailable } = context.mailer;
+
+  serve(router, context, readWorkshop, async ({ em }) => toReply(await em.findOneOrFail(Workshop, 1), mailAvailable));
+
+  serve(router, context, changeWorkshop, async (work, { body, ifMatch }) => {
+    const workshop = await work.em.findOneOrFail(Workshop, 1);
+    await requireVersion(work.em, { kind: 'workshop', id: 1, version: workshop.version }, ifMatch);
+    requireKnownCurrency(body.currency);
+    assignDefined(workshop, decimalsOf(body));
+    await work.em.flush();
+    await logDeed(work, {
+      action: 'changed the shop’s starting values',
+      subjectKind: 'workshop',
+      subjectId: 1,
+      detail: { changed: Object.keys(body) },
+    });
+    return toReply(workshop, mailAvailable);
+  });
+
+  return router;
+}
+
+const decimalFields = [
+  'targetPerHour',
+  'wagePerHour',
+  'packingPerOrder',
+  'rejectPercent',
+  'confidencePercent',
+  'priceStep',
+  'benchHoursPerDay',
+  'spacingMm',
+  'trimMm',
+  'depositPercent',
+] as const;
+type DecimalField = (typeof decimalFields)[number];
+
+type Typed = BodyOf<typeof changeWorkshop>;
+
+function decimalsOf(body: Typed) {
+  const decimals: Partial<Record<DecimalField, Decimal>> = {};
+  for (const field of decimalFields) {
+    const text = body[field];
+    if (text !== undefined) decimals[field] = new Decimal(text);
+  }
+  return { ...(body as Omit<Typed, DecimalField>), ...decimals };
+}
+
+function requireKnownCurrency(code: string | undefined): void {
+  if (code !== undefined && !currencies.some((currency) => currency.code === code)) {
+    throw invalid([{ field: 'currency', message: 'Choose a currency from the list.' }]);
+  }
+}
+
+function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {
+  return {
+    name: workshop.name,
+    currency: workshop.currency,
+    areaUnit: workshop.areaUnit,
+    lengthUnit: workshop.lengthUnit,
+    timeZone: workshop.timeZone,
+    targetPerHour: moneyText(workshop.targetPerHour),
+    wagePerHour: moneyText(workshop.wagePerHour),
+    deskMinutesPerOrder: workshop.deskMinutesPerOrder,
+    packingPerOrder: moneyText(workshop.packingPerOrder),
+    rejectPercent: workshop.rejectPercent.toString(),
+    confidencePercent: workshop.confidencePercent.toString(),
+    priceStep: moneyText(workshop.priceStep),
+    benchHoursPerDay: workshop.benchHoursPerDay.toString(),
+    spacingMm: workshop.spacingMm.toString(),
+    trimMm: workshop.trimMm.toString(),
+    depositPercent: workshop.depositPercent.toString(),
+    quoteValidDays: workshop.quoteValidDays,
+    paymentTermDays: workshop.paymentTermDays,
+    address: workshop.address,
+    taxNumber: workshop.taxNumber,
+    mode: workshop.mode,
+    mailAvailable,
+    version: workshop.version,
+  };
 }

@@ -1,0 +1,109 @@
+import type { PatternDefinition } from '@hidewright/contract';
+import { requireVersion } from '../http/conditions.ts';
+import { invalid, type FieldFault } from '../http/problem.ts';
+import { logDeed } from '../modules/activity/activity-log.ts';
+import { Hardware } from '../modules/hardware/hardware.entity.ts';
+import { keepLayout, type WorkedLayout } from '../modules/layouts/stored-layouts.ts';
+import { Leather } from '../modules/leathers/leather.entity.ts';
+import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
+import { definitionOf, findPattern, latestVersion, sameDefinition } from '../modules/patterns/pattern-versions.ts';
+import { Pattern } from '../modules/patterns/pattern.entity.ts';
+import type { Work } from '../work.ts';
+
+/**
+ * Adds a pattern with its first version, and keeps its layout.
+ * @param worked `await layoutFor(context, definition)`, before the transaction
+ * @throws {Problem} 422 when the name is taken, or leather or hardware do not exist
+ */
+export async function addPattern(
+  work: Work,
+  asked: { name: string; definition: PatternDefinition },
+  worked: WorkedLayout,
+): Promise<Pattern> {
+  await requireSound(work, asked);
+  const pattern = work.em.create(Pattern, { name: asked.name, latestVersion: 1 });
+  await work.em.flush();
+  await addVersion(work, pattern, asked.definition);
+  await keepLayout(work, worked);
+  await logDeed(work, { action: `added pattern ${pattern.name}`, subjectKind: 'pattern', subjectId: pattern.id });
+  return pattern;
+}
+
+/** What may change; what is not named stays. */
+export interface PatternChange {
+  name?: string | undefined;
+  definition?: PatternDefinition | undefined;
+  active?: boolean | undefined;
+}
+
+/**
+ * Changes a pattern. A definition that says something new becomes a new version: quotes keep the version they were
+ * made with.
+ * @throws {Problem} 404, 412 when somebody changed it meanwhile, 422 as for a new one
+ */
+export async function changePattern(
+  work: Work,
+  asked: { id: number; ifMatch: number; change: PatternChange },
+  worked: WorkedLayout,
+): Promise<Pattern> {
+  const pattern = await findPattern(work, asked.id);
+  await requireVersion(work.em, { kind: 'pattern', id: pattern.id, version: pattern.version }, asked.ifMatch);
+  await requireSound(work, asked.change, pattern.id);
+  const { name = pattern.name, active = pattern.active, definition } = asked.change;
+  const redesigned = definition !== undefined && (await isNew(work, pattern, definition));
+  if (!redesigned && name === pattern.name && active === pattern.active) return pattern;
+  Object.assign(pattern, { name, active });
+  if (redesigned) {
+    pattern.latestVersion += 1;
+    await addVersion(work, pattern, definition);
+    await keepLayout(work, worked);
+  }
+  await work.em.flush();
+  const action = redesigned ? `made version ${pattern.latestVersion} of pattern ${name}` : `changed pattern ${name}`;
+  const detail = { changed: Object.keys(asked.change) };
+  await logDeed(work, { action, subjectKind: 'pattern', subjectId: pattern.id, detail });
+  return pattern;
+}
+
+async function isNew(work: Work, pattern: Pattern, definition: PatternDefinition): Promise<boolean> {
+  return !sameDefinition(definitionOf(await latestVersion(work, pattern)), definition);
+}
+
+async function addVersion(work: Work, pattern: Pattern, definition: PatternDefinition): Promise<void> {
+  work.em.create(PatternVersion, {
+    patternId: pattern.id,
+    number: pattern.latestVersion,
+    definition,
+    createdAt: work.now.toISOString(),
+    createdBy: work.actor.name,
+  });
+  await work.em.flush();
+}
+
+async function requireSound(work: Work, asked: PatternChange, ownId?: number): Promise<void> {
+  const faults = [
+    ...(asked.name === undefined ? [] : await nameFaults(work, asked.name, ownId)),
+    ...(asked.definition === undefined ? [] : await partFaults(work, asked.definition)),
+  ];
+  if (faults.length > 0) throw invalid(faults);
+}
+
+async function nameFaults(work: Work, name: string, ownId: number | undefined): Promise<FieldFault[]> {
+  const other = await work.em.findOne(Pattern, { name });
+  if (other === null || other.id === ownId) return [];
+  return [{ field: 'name', message: 'Another pattern has this name. Choose another one.' }];
+}
+
+async function partFaults({ em }: Work, { leatherId, hardware }: PatternDefinition): Promise<FieldFault[]> {
+  const faults: FieldFault[] = [];
+  if ((await em.count(Leather, { id: leatherId })) === 0) {
+    faults.push({ field: 'definition.leatherId', message: 'This leather is not there. Choose one from the list.' });
+  }
+  const known = await em.find(Hardware, { id: { $in: hardware.map((each) => each.hardwareId) } });
+  hardware.forEach(({ hardwareId }, at) => {
+    if (known.some((each) => each.id === hardwareId)) return;
+    const field = `definition.hardware.${at}.hardwareId`;
+    faults.push({ field, message: 'This hardware is not there. Choose one from the list.' });
+  });
+  return faults;
+}

@@ -1,0 +1,91 @@
+import { Decimal } from 'decimal.js';
+import type { addTool as addToolEndpoint, BodyOf, changeTool as changeToolEndpoint } from '@hidewright/contract';
+import { assignDefined } from '../db/assign-defined.ts';
+import { requireVersion } from '../http/conditions.ts';
+import { invalid, type FieldFault } from '../http/problem.ts';
+import { logDeed } from '../modules/activity/activity-log.ts';
+import { Customer } from '../modules/customers/customer.entity.ts';
+import { Pattern } from '../modules/patterns/pattern.entity.ts';
+import { findTool } from '../modules/tools/find-tool.ts';
+import { requireNextState } from '../modules/tools/tool-states.ts';
+import { Tool } from '../modules/tools/tool.entity.ts';
+import type { Work } from '../work.ts';
+
+/**
+ * Adds a cutting die or stamp plate.
+ * @throws {Problem} 422 when its number is taken, its metal does not suit its kind, or its pattern or customer does not exist
+ */
+export async function addTool(work: Work, asked: BodyOf<typeof addToolEndpoint>): Promise<Tool> {
+  const number = asked.number === '' ? await nextNumber(work, asked.kind) : asked.number;
+  await requireSound(work, { ...asked, number });
+  const tool = work.em.create(Tool, { ...asked, number, cost: new Decimal(asked.cost) });
+  await work.em.flush();
+  await logDeed(work, { action: `added ${nameOf(tool)}`, subjectKind: 'tool', subjectId: tool.id });
+  return tool;
+}
+
+/**
+ * Changes a cutting die or stamp plate; its count of uses changes only through its ledger.
+ * @throws {Problem} 404, 409 for a state that cannot follow, 412, 422 as for a new one
+ */
+export async function changeTool(
+  work: Work,
+  asked: { id: number; ifMatch: number; change: BodyOf<typeof changeToolEndpoint> },
+): Promise<Tool> {
+  const tool = await findTool(work, asked.id);
+  await requireVersion(work.em, { kind: 'tool', id: tool.id, version: tool.version }, asked.ifMatch);
+  const { cost, ...plain } = asked.change;
+  if (plain.state !== undefined) requireNextState(tool, plain.state);
+  assignDefined(tool, plain);
+  if (cost !== undefined) tool.cost = new Decimal(cost);
+  await requireSound(work, tool);
+  await work.em.flush();
+  const detail = { changed: Object.keys(asked.change), state: tool.state };
+  await logDeed(work, { action: `changed ${nameOf(tool)}`, subjectKind: 'tool', subjectId: tool.id, detail });
+  return tool;
+}
+
+const nameOf = ({ kind, number, name }: Tool) => `${kind} ${number}, ${name}`;
+
+/** One more than the highest whole number of its kind. */
+async function nextNumber({ em }: Work, kind: Tool['kind']): Promise<string> {
+  const tools = await em.find(Tool, { kind }, { fields: ['number'] });
+  const numbers = tools.map(({ number }) => (/^\d+$/.test(number) ? Number(number) : 0));
+  return String(Math.max(0, ...numbers) + 1);
+}
+
+type Checked = Pick<Tool, 'kind' | 'number' | 'metal' | 'patternId' | 'customerId'> & { id?: number };
+
+async function requireSound(work: Work, tool: Checked): Promise<void> {
+  const faults = [...metalFaults(tool), ...(await numberFaults(work, tool)), ...(await ownerFaults(work, tool))];
+  if (faults.length > 0) throw invalid(faults);
+}
+
+function metalFaults({ kind, metal }: Checked): FieldFault[] {
+  if (kind === 'stamp plate' && metal === '') {
+    return [{ field: 'metal', message: 'Choose what the plate is made of.' }];
+  }
+  if (kind === 'cutting die' && metal !== '' && metal !== 'steel') {
+    return [{ field: 'metal', message: 'A cutting die is of steel. Choose steel, or leave it empty.' }];
+  }
+  return [];
+}
+
+async function numberFaults({ em }: Work, { id, kind, number }: Checked): Promise<FieldFault[]> {
+  // The tool being changed is left out by its id, since asking would first write its change.
+  const others = await em.find(Tool, { kind, number }, { flushMode: 'commit', disableIdentityMap: true });
+  if (others.every((other) => other.id === id)) return [];
+  return [{ field: 'number', message: `There is a ${kind} ${number} already. Choose another number.` }];
+}
+
+async function ownerFaults({ em }: Work, { patternId, customerId }: Checked): Promise<FieldFault[]> {
+  const faults: FieldFault[] = [];
+  const options = { flushMode: 'commit' } as const;
+  if (patternId !== null && (await em.findOne(Pattern, patternId, options)) === null) {
+    faults.push({ field: 'patternId', message: 'This pattern is not there. Choose one from the list.' });
+  }
+  if (customerId !== null && (await em.findOne(Customer, customerId, options)) === null) {
+    faults.push({ field: 'customerId', message: 'This customer is not there. Choose one from the list.' });
+  }
+  return faults;
+}

@@ -1,0 +1,66 @@
+import { invalid, wrongState } from '../http/problem.ts';
+import { logDeed } from '../modules/activity/activity-log.ts';
+import { enqueueMail } from '../modules/mail/outbox.ts';
+import { findPurchaseOrder } from '../modules/purchase-orders/draft-purchase-order.ts';
+import type { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
+import { readOnePurchaseOrder } from '../modules/purchase-orders/read-purchase-orders.ts';
+import { Supplier } from '../modules/suppliers/supplier.entity.ts';
+import { Workshop } from '../modules/workshop/workshop.entity.ts';
+import { purchaseOrderLetter } from '../papers/purchase-order-letter.ts';
+import type { Work } from '../work.ts';
+
+/**
+ * Sends a draft to its supplier, by e-mail or in the owner's own way; from now on it is awaited.
+ * @throws {Problem} 409 when it is no draft, 422 when it cannot go by e-mail
+ */
+export async function sendPurchaseOrder(
+  work: Work,
+  asked: { id: number; by: 'mail' | 'hand'; mailIsSet: boolean },
+): Promise<void> {
+  const order = await findPurchaseOrder(work, asked.id);
+  if (order.state !== 'draft') throw notADraft(order);
+  const supplier = await work.em.findOneOrFail(Supplier, order.supplierId);
+  if (asked.by === 'mail') requireMail(supplier, asked.mailIsSet);
+  order.state = 'sent';
+  order.sentAt = work.now.toISOString();
+  order.expectedOn ??= daysAfter(work.today, supplier.leadDays);
+  await work.em.flush();
+  if (asked.by === 'mail') await mail(work, order, supplier);
+  await logDeed(work, {
+    action: `sent purchase order ${order.number} to ${supplier.name} ${asked.by === 'mail' ? 'by e-mail' : 'by hand'}`,
+    subjectKind: 'purchase order',
+    subjectId: order.id,
+    detail: { from: 'draft', to: 'sent', by: asked.by },
+  });
+}
+
+function notADraft(order: PurchaseOrder) {
+  const open = order.state === 'sent' || order.state === 'part received';
+  return wrongState(`${order.number} is ${order.state} already; only a draft can be sent.`, open ? ['receive'] : []);
+}
+
+function requireMail(supplier: Supplier, mailIsSet: boolean): void {
+  if (!mailIsSet) {
+    throw invalid([{ field: 'by', message: 'Mail is not set up in this shop. Hand the order over yourself.' }]);
+  }
+  if (supplier.email !== '') return;
+  const message = `${supplier.name} has no e-mail address. Add one to the supplier, or hand the order over yourself.`;
+  throw invalid([{ field: 'by', message }]);
+}
+
+async function mail(work: Work, order: PurchaseOrder, supplier: Supplier): Promise<void> {
+  const workshop = await work.em.findOneOrFail(Workshop, 1);
+  await enqueueMail(work, {
+    recipient: supplier.email,
+    ...purchaseOrderLetter(await readOnePurchaseOrder(work.em, order.id), workshop),
+    attachments: [],
+    subjectKind: 'purchase order',
+    subjectId: order.id,
+  });
+}
+
+function daysAfter(day: string, days: number): string {
+  const date = new Date(`${day}T00:00:00Z`);
+  date.setUTCDate(date.getUTCDate() + days);
+  return date.toISOString().slice(0, 10);
+}

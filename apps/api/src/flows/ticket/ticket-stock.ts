@@ -1,0 +1,95 @@
+import type { JobHardware, JobLot } from '@hidewright/contract';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { Hardware } from '../../modules/hardware/hardware.entity.ts';
+import { Lot } from '../../modules/lots/lot.entity.ts';
+import { Reservation } from '../../modules/stock/reservation.entity.ts';
+import { StockBalance } from '../../modules/stock/stock-balance.entity.ts';
+import { StockMovement } from '../../modules/stock/stock-movement.entity.ts';
+
+type Keyed = { lotId: number | null; hardwareId: number | null };
+
+/** What a job holds and has taken, by what it is about. */
+interface JobStock {
+  held(item: Partial<Keyed>): number;
+  taken(item: Partial<Keyed>): number;
+  rows: Keyed[];
+}
+
+export async function stockOfJob(em: EntityManager, jobId: number): Promise<JobStock> {
+  const reservations = await em.find(Reservation, { jobId });
+  const moved = await em.find(StockMovement, { jobId });
+  return {
+    held: (item) => sum(reservations.filter(same(item)).map(({ open }) => open)),
+    taken: (item) => -sum(moved.filter(same(item)).map(({ quantity }) => quantity)),
+    rows: [...reservations, ...moved],
+  };
+}
+
+const sum = (numbers: number[]): number => numbers.reduce((total, each) => total + each, 0);
+
+function same(item: Partial<Keyed>): (row: Keyed) => boolean {
+  const { lotId = null, hardwareId = null } = item;
+  return (row) => row.lotId === lotId && row.hardwareId === hardwareId;
+}
+
+const areaText = (quantity: number): string => unscaled(quantity, 3).toString();
+
+/** The lots that the job holds or has taken from, and those of its leather that still have something free. */
+export async function ticketLots(em: EntityManager, stock: JobStock, leatherId: number): Promise<JobLot[]> {
+  const own = stock.rows.flatMap(({ lotId }) => (lotId === null ? [] : [lotId]));
+  const lots = await em.find(Lot, { $or: [{ leatherId }, { id: { $in: own } }] }, { orderBy: { id: 'asc' } });
+  const free = await freeByItem(em, { lotId: { $in: lots.map(({ id }) => id) } });
+  return lots
+    .map((lot) => ({
+      lotId: lot.id,
+      tag: lot.tag,
+      form: lot.form,
+      shade: lot.shade,
+      place: lot.place,
+      held: stock.held({ lotId: lot.id }),
+      free: free.get(`lot ${lot.id}`) ?? 0,
+      taken: stock.taken({ lotId: lot.id }),
+    }))
+    .filter(({ held, free, taken }) => held > 0 || free > 0 || taken > 0)
+    .sort((a, b) => b.held - a.held || b.taken - a.taken)
+    .map(({ held, free, taken, ...lot }) => ({
+      ...lot,
+      heldAreaMm2: areaText(held),
+      freeAreaMm2: areaText(free),
+      takenAreaMm2: areaText(taken),
+    }));
+}
+
+/** The hardware that the pattern asks for, and whatever else was taken. */
+export async function ticketHardware(
+  em: EntityManager,
+  stock: JobStock,
+  asked: readonly { hardwareId: number; quantity: number }[],
+): Promise<JobHardware[]> {
+  const needed = new Map(asked.map(({ hardwareId, quantity }) => [hardwareId, quantity]));
+  const also = stock.rows.flatMap(({ hardwareId }) => (hardwareId === null ? [] : [hardwareId]));
+  const ids = [...new Set([...needed.keys(), ...also])];
+  const hardware = await em.find(Hardware, { id: { $in: ids } }, { orderBy: { name: 'asc' } });
+  const free = await freeByItem(em, { hardwareId: { $in: ids } });
+  return hardware.map(({ id, name }) => ({
+    hardwareId: id,
+    name,
+    needed: needed.get(id) ?? 0,
+    held: stock.held({ hardwareId: id }),
+    free: free.get(`hardware ${id}`) ?? 0,
+    taken: stock.taken({ hardwareId: id }),
+  }));
+}
+
+type Which = { lotId: { $in: number[] } } | { hardwareId: { $in: number[] } };
+
+async function freeByItem(em: EntityManager, which: Which): Promise<Map<string, number>> {
+  const balances = await em.find(StockBalance, which);
+  return new Map(
+    balances.map(({ lotId, hardwareId, onHand, reserved }) => [
+      lotId === null ? `hardware ${hardwareId}` : `lot ${lotId}`,
+      Math.max(0, onHand - reserved),
+    ]),
+  );
+}

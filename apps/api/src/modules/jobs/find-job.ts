@@ -1,0 +1,31 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { notFound, wrongState } from '../../http/problem.ts';
+import { Job } from './job.entity.ts';
+import { JobStep } from './job-step.entity.ts';
+
+/** @throws {Problem} 404 */
+export async function findJob(em: EntityManager, id: number): Promise<Job> {
+  const job = await em.findOne(Job, id);
+  if (job === null) throw notFound('job');
+  return job;
+}
+
+/** A job's steps, in the order of the work. */
+export function stepsOf(em: EntityManager, jobId: number): Promise<JobStep[]> {
+  return em.find(JobStep, { jobId }, { orderBy: { position: 'asc' } });
+}
+
+const refusals: Record<Job['state'], { because: string; allowed: string[] }> = {
+  waiting: { because: 'still waits for what its order awaits. Note on the order what has arrived', allowed: ['note what has arrived'] },
+  ready: { because: 'has not been begun. Take its leather, or log on its first step', allowed: ['take', 'log', 'finish'] },
+  'at the bench': { because: 'is at the bench. Log on its steps, pause it, or finish it', allowed: ['take', 'log', 'pause', 'finish'] },
+  paused: { because: 'is paused. Resume it first', allowed: ['resume'] },
+  finished: { because: 'is finished, and its counts are closed. Read its estimate and fact', allowed: ['read estimate and fact'] },
+};
+
+/** @throws {Problem} 409 with what the job's state does allow */
+export function requireJobState(job: Job, ...states: Job['state'][]): void {
+  if (states.includes(job.state)) return;
+  const { because, allowed } = refusals[job.state];
+  throw wrongState(`${job.number} ${because}.`, allowed);
+}

@@ -1,0 +1,98 @@
+import { createHash } from 'node:crypto';
+import { handCount, layoutInputKey, outlinePath, type Layout } from '@hidewright/domain';
+import {
+  layoutSourceOf,
+  outlineOf,
+  type LayoutAsked,
+  type LayoutSource,
+  type StoredLayoutReply,
+} from '@hidewright/contract';
+import type { Context } from '../../context.ts';
+import { invalid, notFound } from '../../http/problem.ts';
+import type { Work } from '../../work.ts';
+import { StoredLayout } from './layout.entity.ts';
+
+/** A layout that is known but perhaps not kept yet. */
+export interface WorkedLayout {
+  inputHash: string;
+  source: LayoutSource;
+  layout: Layout;
+}
+
+/** Finds a layout by what goes into it. */
+export function layoutHash(asked: LayoutAsked): string {
+  return hashOf(layoutSourceOf(asked));
+}
+
+/**
+ * The layout for a pattern's definition (or any request for one): found by the hash of its input, or else worked
+ * out by a worker. Belongs into an endpoint's `prepare`, outside the transaction; `keepLayout` then stores it.
+ */
+export async function layoutFor(
+  context: Pick<Context, 'orm' | 'workers'>,
+  asked: LayoutAsked,
+): Promise<WorkedLayout> {
+  const source = layoutSourceOf(asked);
+  const inputHash = hashOf(source);
+  const stored = await context.orm.em.fork().findOne(StoredLayout, { inputHash });
+  if (stored !== null) return { inputHash, source, layout: stored.result as Layout };
+  const layout =
+    source.by === 'outline' ? await context.workers.layOut(source.input) : handCount(source.counted);
+  return { inputHash, source, layout };
+}
+
+/** Stores a layout once, in the transaction that uses it; the same input finds the same row. */
+export async function keepLayout(work: Pick<Work, 'em' | 'now'>, worked: WorkedLayout): Promise<StoredLayout> {
+  const { inputHash, source, layout } = worked;
+  const stored = await work.em.findOne(StoredLayout, { inputHash });
+  if (stored !== null) return stored;
+  const created = work.em.create(StoredLayout, {
+    inputHash,
+    input: source,
+    result: layout,
+    pieces: layout.pieces,
+    createdAt: work.now.toISOString(),
+  });
+  await work.em.flush();
+  return created;
+}
+
+/** @throws {Problem} 404 */
+export async function readLayout(em: Work['em'], id: number): Promise<Layout> {
+  return (await findLayout(em, id)).result as Layout;
+}
+
+/** @throws {Problem} 404 */
+export async function findLayout(em: Work['em'], id: number): Promise<StoredLayout> {
+  const stored = await em.findOne(StoredLayout, id);
+  if (stored === null) throw notFound('layout');
+  return stored;
+}
+
+/** Refuses to price or to make what no leather gives: the layout says honestly that nothing fits. */
+export function requirePieces(layout: Layout, field = 'patternId'): void {
+  if (layout.pieces > 0) return;
+  const message = 'Not one piece fits on the panel or strip of this pattern. Make the panel larger or the outline smaller.';
+  throw invalid([{ field, message }]);
+}
+
+/** The drawing of what was laid out; none for a hand count. */
+export function pathOf(stored: Pick<StoredLayout, 'input'>): string | null {
+  const source = stored.input as LayoutSource;
+  return source.by === 'outline' ? outlinePath(source.input.outline) : null;
+}
+
+/** The drawing of a pattern's outline, also where a hand count drives its layout. */
+export function pathOfDefinition(definition: Pick<LayoutAsked, 'outline'>): string | null {
+  return definition.outline === null ? null : outlinePath(outlineOf(definition.outline));
+}
+
+export function layoutReply(stored: StoredLayout): StoredLayoutReply {
+  return { id: stored.id, layout: stored.result as Layout, outlinePath: pathOf(stored) };
+}
+
+function hashOf(source: LayoutSource): string {
+  const key =
+    source.by === 'outline' ? layoutInputKey(source.input) : `hand count ${JSON.stringify(source.counted)}`;
+  return createHash('sha256').update(key).digest('hex');
+}

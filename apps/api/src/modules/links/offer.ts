@@ -1,0 +1,62 @@
+import { describeOutline } from '@hidewright/domain';
+import type { LayoutSource, Offer } from '@hidewright/contract';
+import { notFound, Problem } from '../../http/problem.ts';
+import type { Work } from '../../work.ts';
+import { Customer } from '../customers/customer.entity.ts';
+import { StoredLayout } from '../layouts/layout.entity.ts';
+import { pathOf } from '../layouts/stored-layouts.ts';
+import { Quote } from '../quotes/quote.entity.ts';
+import { quotedOf } from '../quotes/quoted.ts';
+import { Workshop } from '../workshop/workshop.entity.ts';
+import { quoteBehind } from './customer-links.ts';
+
+/** The same words for a token that never was, has expired or was stopped. */
+const noOffer = () =>
+  new Problem(404, 'Not found', 'This link does not work, or no longer works. Ask the shop for a new one.');
+
+/** @throws {Problem} 404 when the token opens nothing */
+export async function quoteIdBehind(work: Work, token: string): Promise<number> {
+  const quoteId = await quoteBehind(work, token);
+  if (quoteId === undefined) throw noOffer();
+  return quoteId;
+}
+
+/** What the customer sees of a quote. @throws {Problem} 404 */
+export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
+  const quote = await work.em.findOne(Quote, quoteId);
+  if (quote === null) throw notFound('quote');
+  const workshop = await work.em.findOneOrFail(Workshop, 1);
+  const customer = await work.em.findOneOrFail(Customer, quote.customerId);
+  const { breaks, tooling, toolingTotal } = await quotedOf(work, quote);
+  return {
+    shopName: workshop.name,
+    number: quote.number,
+    state: stateOf(quote, work.today),
+    customerName: customer.name,
+    title: quote.title,
+    inHandsOn: quote.inHandsOn,
+    validUntil: quote.validUntil,
+    message: quote.message,
+    outline: outlineOf(await work.em.findOneOrFail(StoredLayout, quote.layoutId)),
+    currency: workshop.currency,
+    breaks: breaks.map(({ quantity, priceEach, goodsTotal, total }) => ({ quantity, priceEach, goodsTotal, total })),
+    tooling,
+    toolingTotal,
+    agreedQuantity: quote.agreedQuantity,
+    agreedAt: quote.agreedAt,
+  };
+}
+
+/** A draft or superseded quote has no link that works. */
+function stateOf(quote: Quote, today: string): Offer['state'] {
+  if (quote.state === 'agreed' || quote.state === 'declined') return quote.state;
+  if (quote.state !== 'sent') return 'lapsed';
+  return quote.validUntil !== null && quote.validUntil < today ? 'lapsed' : 'open';
+}
+
+function outlineOf(stored: StoredLayout): Offer['outline'] {
+  const path = pathOf(stored);
+  const source = stored.input as LayoutSource;
+  if (path === null || source.by !== 'outline') return null;
+  return { path, words: describeOutline(source.input.outline) };
+}

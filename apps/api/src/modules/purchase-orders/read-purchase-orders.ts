@@ -1,0 +1,95 @@
+import { Decimal } from 'decimal.js';
+import type { FilterQuery } from '@mikro-orm/core';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import type { PurchaseLine as LineReply, PurchaseOrder as OrderReply } from '@hidewright/contract';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { moneyText, priceText } from '../../http/decimal-text.ts';
+import { notFound } from '../../http/problem.ts';
+import { Hardware } from '../hardware/hardware.entity.ts';
+import { Leather } from '../leathers/leather.entity.ts';
+import { Supplier } from '../suppliers/supplier.entity.ts';
+import { lineAmount } from './line-amount.ts';
+import { PurchaseLine } from './purchase-line.entity.ts';
+import { PurchaseOrder } from './purchase-order.entity.ts';
+
+/** Orders with their lines and every name in them, newest first. */
+export async function readPurchaseOrderList(
+  em: EntityManager,
+  where: FilterQuery<PurchaseOrder>,
+  limit: number,
+): Promise<OrderReply[]> {
+  const orders = await em.find(PurchaseOrder, where, { orderBy: { id: 'desc' }, limit });
+  const lines = await em.find(
+    PurchaseLine,
+    { purchaseOrderId: orders.map((order) => order.id) },
+    { orderBy: { position: 'asc' } },
+  );
+  const names = await readNames(em, lines);
+  const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
+  return orders.map((order) => {
+    const own = lines.filter((line) => line.purchaseOrderId === order.id);
+    return toReply(order, suppliers.get(order.supplierId), own, names);
+  });
+}
+
+/** @throws {Problem} 404 */
+export async function readOnePurchaseOrder(em: EntityManager, id: number): Promise<OrderReply> {
+  const [found] = await readPurchaseOrderList(em, { id }, 1);
+  if (found === undefined) throw notFound('purchase order');
+  return found;
+}
+
+interface Names {
+  leathers: Map<number, Leather>;
+  hardware: Map<number, Hardware>;
+}
+
+async function readNames(em: EntityManager, lines: PurchaseLine[]): Promise<Names> {
+  const ids = (of: 'leatherId' | 'hardwareId') => lines.flatMap((line) => line[of] ?? []);
+  return {
+    leathers: await byId(em.find(Leather, { id: ids('leatherId') })),
+    hardware: await byId(em.find(Hardware, { id: ids('hardwareId') })),
+  };
+}
+
+async function byId<T extends { id: number }>(rows: Promise<T[]>): Promise<Map<number, T>> {
+  return new Map((await rows).map((row) => [row.id, row]));
+}
+
+function toReply(order: PurchaseOrder, supplier: Supplier | undefined, lines: PurchaseLine[], names: Names): OrderReply {
+  return {
+    id: order.id,
+    number: order.number,
+    supplierId: order.supplierId,
+    supplierName: supplier?.name ?? '',
+    supplierEmail: supplier?.email ?? '',
+    state: order.state,
+    createdAt: order.createdAt,
+    sentAt: order.sentAt,
+    expectedOn: order.expectedOn,
+    note: order.note,
+    lines: lines.map((line) => toLine(line, names)),
+    total: moneyText(lines.reduce((sum, line) => sum.plus(lineAmount(line)), new Decimal(0))),
+    version: order.version,
+  };
+}
+
+function toLine(line: PurchaseLine, names: Names): LineReply {
+  const ofLeather = line.leatherId !== null;
+  const area = (thousandths: number) => (ofLeather ? unscaled(thousandths, 3).toFixed() : null);
+  const pieces = (quantity: number) => (ofLeather ? null : quantity);
+  return {
+    id: line.id,
+    position: line.position,
+    of: ofLeather ? 'leather' : 'hardware',
+    leatherId: line.leatherId,
+    hardwareId: line.hardwareId,
+    name: names.leathers.get(line.leatherId ?? 0)?.name ?? names.hardware.get(line.hardwareId ?? 0)?.name ?? '',
+    areaMm2: area(line.quantity),
+    receivedAreaMm2: area(line.received),
+    quantity: pieces(line.quantity),
+    received: pieces(line.received),
+    unitPrice: priceText(line.unitPrice),
+    amount: moneyText(lineAmount(line)),
+  };
+}

@@ -1,0 +1,225 @@
+import type { Decimal } from 'decimal.js';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { invalid, wrongState } from '../../http/problem.ts';
+import type { Work } from '../../work.ts';
+import { describeItem } from './described-item.ts';
+import { Reservation } from './reservation.entity.ts';
+import { StockBalance } from './stock-balance.entity.ts';
+import { itemOf, keysOf, type StockItem } from './stock-item.ts';
+import { StockMovement } from './stock-movement.entity.ts';
+import { shareOfCost, valueOnHand } from './stock-value.ts';
+
+/*
+ * The one place that writes movements, balances and reservations: they change together, so that what is kept always
+ * equals what is written. Quantities are whole numbers as stored: thousandths of mm² of a lot, pieces of hardware.
+ */
+
+interface Received {
+  quantity: number;
+  /** What was paid for all of it. */
+  value: Decimal;
+  purchaseOrderId?: number | null;
+  reason?: string;
+}
+
+interface JobQuantity {
+  jobId: number;
+  quantity: number;
+}
+
+interface Taken {
+  /** Nobody's job: spoiled, or used in the shop. */
+  jobId: number | null;
+  quantity: number;
+  reason?: string;
+}
+
+interface Adjusted {
+  /** What was counted or measured on the rack, 0 or more. */
+  counted: number;
+  reason: string;
+}
+
+export interface Free {
+  onHand: number;
+  reserved: number;
+  /** On hand and held for nobody; 0 when an honest count left less than is held. */
+  free: number;
+}
+
+/** What of an item is on hand, held for jobs, and free. */
+export async function freeOf(em: EntityManager, item: StockItem): Promise<Free> {
+  const balance = await em.findOne(StockBalance, keysOf(item));
+  const { onHand, reserved } = balance ?? { onHand: 0, reserved: 0 };
+  return { onHand, reserved, free: Math.max(0, onHand - reserved) };
+}
+
+/** Puts on the rack what came in. */
+export async function receiveStock(work: Work, received: Received & StockItem): Promise<StockMovement> {
+  requireQuantity(received.quantity);
+  const { quantity, value, purchaseOrderId = null, reason = '' } = received;
+  return move(work, received, { kind: 'receive', quantity, value, purchaseOrderId, reason });
+}
+
+/**
+ * Holds stock for a job.
+ * @throws {Problem} 409 naming what is free when it is less
+ */
+export async function reserveStock(work: Work, asked: JobQuantity & StockItem): Promise<Reservation> {
+  requireQuantity(asked.quantity);
+  const { free } = await freeOf(work.em, asked);
+  if (asked.quantity > free) throw await tooLittle(work, asked, asked.quantity, free);
+  const balance = await balanceOf(work.em, asked);
+  balance.reserved += asked.quantity;
+  const { jobId, quantity } = asked;
+  const reservation = work.em.create(Reservation, { ...keysOf(asked), jobId, quantity, open: quantity });
+  await work.em.flush();
+  return reservation;
+}
+
+/**
+ * Takes stock from the rack: first what is held for the job, then what is free.
+ * @throws {Problem} 409 naming what the job can have when it is less
+ */
+export async function takeStock(work: Work, asked: Taken & StockItem): Promise<StockMovement> {
+  const { jobId, quantity, reason = '' } = asked;
+  requireQuantity(quantity);
+  const { onHand, free } = await freeOf(work.em, asked);
+  const held = jobId === null ? [] : await openReservations(work.em, { ...keysOf(asked), jobId });
+  const own = held.reduce((sum, reservation) => sum + reservation.open, 0);
+  const most = Math.min(onHand, own + free);
+  if (quantity > most) throw await tooLittle(work, asked, quantity, most);
+  const value = (await costOf(work.em, asked, quantity)).negated();
+  await useHeld(work.em, held, quantity);
+  return move(work, asked, { kind: 'take', quantity: -quantity, value, jobId, reason });
+}
+
+/**
+ * Puts back on the rack what a job had taken and did not use; it is free again.
+ * @throws {Problem} 409 when the job has not taken as much
+ */
+export async function returnStock(
+  work: Work,
+  asked: JobQuantity & { reason?: string } & StockItem,
+): Promise<StockMovement> {
+  const { jobId, quantity, reason = '' } = asked;
+  requireQuantity(quantity);
+  const taken = await takenBy(work.em, asked, jobId);
+  if (quantity > taken) {
+    const { name, say } = await describeItem(work.em, asked);
+    throw wrongState(
+      `This job has taken ${say(taken)} of ${name}; ${say(quantity)} cannot come back. Return less, or adjust the count.`,
+      [`return up to ${say(taken)}`],
+    );
+  }
+  const value = await costOf(work.em, asked, quantity);
+  return move(work, asked, { kind: 'return', quantity, value, jobId, reason });
+}
+
+/**
+ * Sets what is on hand to what was counted. A count that agrees moves nothing; one that leaves less than is held for
+ * jobs names the reservations that now stand on too little.
+ */
+export async function adjustStock(
+  work: Work,
+  asked: Adjusted & StockItem,
+): Promise<{ movement: StockMovement | null; broken: Reservation[] }> {
+  if (!Number.isSafeInteger(asked.counted) || asked.counted < 0) {
+    throw invalid([{ field: 'counted', message: 'Enter what is there: 0 or more.' }]);
+  }
+  const { onHand, reserved } = await freeOf(work.em, asked);
+  const quantity = asked.counted - onHand;
+  const value = await costOf(work.em, asked, Math.abs(quantity));
+  const movement =
+    quantity === 0
+      ? null
+      : await move(work, asked, {
+          kind: 'adjust',
+          quantity,
+          value: quantity < 0 ? value.negated() : value,
+          reason: asked.reason,
+        });
+  return { movement, broken: asked.counted < reserved ? await openReservations(work.em, keysOf(asked)) : [] };
+}
+
+/** Lets go of everything that is still held for a job. */
+export async function releaseReservations(work: Work, jobId: number): Promise<void> {
+  for (const reservation of await openReservations(work.em, { jobId })) {
+    const balance = await balanceOf(work.em, itemOf(reservation));
+    balance.reserved -= reservation.open;
+    reservation.open = 0;
+  }
+  await work.em.flush();
+}
+
+async function openReservations(
+  em: EntityManager,
+  where: { jobId?: number; lotId?: number | null; hardwareId?: number | null },
+): Promise<Reservation[]> {
+  return em.find(Reservation, { ...where, open: { $gt: 0 } }, { orderBy: { id: 'asc' } });
+}
+
+async function useHeld(em: EntityManager, held: Reservation[], quantity: number): Promise<void> {
+  let left = quantity;
+  for (const reservation of held) {
+    const used = Math.min(left, reservation.open);
+    const balance = await balanceOf(em, itemOf(reservation));
+    balance.reserved -= used;
+    reservation.open -= used;
+    left -= used;
+  }
+}
+
+interface Movement {
+  kind: StockMovement['kind'];
+  quantity: number;
+  value: Decimal;
+  jobId?: number | null;
+  purchaseOrderId?: number | null;
+  reason: string;
+}
+
+/** A movement and its balance, in one flush. */
+async function move(work: Work, item: StockItem, movement: Movement): Promise<StockMovement> {
+  const balance = await balanceOf(work.em, item);
+  balance.onHand += movement.quantity;
+  const row = work.em.create(StockMovement, {
+    ...movement,
+    ...keysOf(item),
+    at: work.now.toISOString(),
+    day: work.today,
+    actorId: work.actor.id,
+    actorName: work.actor.name,
+  });
+  await work.em.flush();
+  return row;
+}
+
+async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalance> {
+  const found = await em.findOne(StockBalance, keysOf(item));
+  return found ?? em.create(StockBalance, { ...keysOf(item), onHand: 0, reserved: 0 });
+}
+
+async function costOf(em: EntityManager, item: StockItem, quantity: number): Promise<Decimal> {
+  const { onHand } = await freeOf(em, item);
+  const { unitCost } = await describeItem(em, item);
+  return shareOfCost(quantity, { onHand, value: await valueOnHand(em, item), unitCost });
+}
+
+async function takenBy(em: EntityManager, item: StockItem, jobId: number): Promise<number> {
+  const moved = await em.find(StockMovement, { ...keysOf(item), jobId, kind: { $in: ['take', 'return'] } });
+  return moved.reduce((sum, movement) => sum - movement.quantity, 0);
+}
+
+async function tooLittle(work: Work, item: StockItem, asked: number, most: number) {
+  const { name, say } = await describeItem(work.em, item);
+  return wrongState(
+    `There is ${say(most)} of ${name} to be had, and ${say(asked)} was asked for. Ask for less, or receive more first.`,
+    most > 0 ? [`up to ${say(most)}`] : [],
+  );
+}
+
+function requireQuantity(quantity: number): void {
+  if (Number.isSafeInteger(quantity) && quantity > 0) return;
+  throw invalid([{ field: 'quantity', message: 'Enter a quantity above 0.' }]);
+}

@@ -1,0 +1,195 @@
+import type { ToDo } from '@hidewright/contract';
+
+type Role = 'owner' | 'maker' | 'bookkeeper';
+
+interface Row {
+  id: number;
+  number: string;
+  title: string;
+  customer: string;
+  day: string | null;
+  extra: string | null;
+}
+
+/** Where a kind of thing to do comes from: its rows, most pressing first, and what to say of each. */
+interface Source {
+  roles: readonly Role[];
+  /** `:today` is the shop's calendar day. */
+  sql: string;
+  say: (row: Row, today: string) => ToDo;
+}
+
+const by = (word: string, day: string | null) => (day === null ? null : { word, day });
+const past = (day: string | null, today: string) => day !== null && day < today;
+
+export const sources: Source[] = [
+  {
+    roles: ['owner'],
+    sql: `SELECT q.id, q.number, q.title, c.name AS customer, q.in_hands_on AS day, q.agreed_quantity AS extra
+      FROM quote q JOIN customer c ON c.id = q.customer_id LEFT JOIN customer_order o ON o.quote_id = q.id
+      WHERE q.state = 'agreed' AND o.id IS NULL ORDER BY q.in_hands_on, q.id LIMIT 6`,
+    say: (row, today) => ({
+      kind: 'take on',
+      title: 'Take on',
+      detail: `${row.customer} agreed to ${row.extra ?? ''} ${row.title}`,
+      when: by('in hands', row.day),
+      late: past(row.day, today),
+      action: 'Can we make it?',
+      to: `/counter/quotes/${row.id}`,
+    }),
+  },
+  {
+    roles: ['maker'],
+    sql: `SELECT j.id, j.number, o.title, c.name AS customer, o.promised_on AS day, j.state AS extra
+      FROM job j JOIN customer_order o ON o.id = j.order_id JOIN customer c ON c.id = o.customer_id
+      WHERE j.state IN ('at the bench', 'ready', 'paused')
+      ORDER BY CASE j.state WHEN 'at the bench' THEN 0 ELSE 1 END, o.promised_on, j.id LIMIT 6`,
+    say: (row, today) => ({
+      kind: 'make',
+      title: row.title,
+      detail: `${row.number} for ${row.customer}, ${row.extra ?? ''}`,
+      when: by('promised for', row.day),
+      late: past(row.day, today),
+      action: row.extra === 'ready' ? 'Begin' : 'Go on',
+      to: `/bench/jobs/${row.id}`,
+    }),
+  },
+  {
+    roles: ['maker'],
+    sql: `SELECT q.id, q.number, q.title, c.name AS customer, q.in_hands_on AS day, q.agreed_quantity AS extra
+      FROM quote q JOIN customer c ON c.id = q.customer_id LEFT JOIN customer_order o ON o.quote_id = q.id
+      WHERE q.state IN ('sent', 'agreed') AND o.id IS NULL ORDER BY q.state, q.id DESC LIMIT 4`,
+    say: (row) => ({
+      kind: 'check',
+      title: 'Can we make it?',
+      detail: `${row.extra === null ? '' : `${row.extra} `}${row.title} for ${row.customer}`,
+      when: by('in hands', row.day),
+      late: false,
+      action: 'Check',
+      to: `/bench/checks/${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner'],
+    sql: `SELECT o.id, o.number, o.title, c.name AS customer, o.promised_on AS day, o.awaits AS extra
+      FROM customer_order o JOIN customer c ON c.id = o.customer_id
+      WHERE o.state IN ('awaiting proof', 'awaiting deposit', 'awaiting tooling') ORDER BY o.promised_on LIMIT 5`,
+    say: (row, today) => ({
+      kind: 'clear',
+      title: `Awaiting ${(JSON.parse(row.extra ?? '[]') as string[]).join(' and ')}`,
+      detail: `${row.title} for ${row.customer}`,
+      when: by('promised for', row.day),
+      late: past(row.day, today),
+      action: 'Look',
+      to: `/counter/orders/${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner', 'maker'],
+    sql: `SELECT p.id, p.number, s.name AS title, s.name AS customer, p.expected_on AS day, p.state AS extra
+      FROM purchase_order p JOIN supplier s ON s.id = p.supplier_id
+      WHERE p.state IN ('sent', 'part received') ORDER BY p.expected_on LIMIT 4`,
+    say: (row, today) => ({
+      kind: 'receive',
+      title: 'Receive',
+      detail: `${row.number} from ${row.customer}`,
+      when: by('expected', row.day),
+      late: past(row.day, today),
+      action: 'Receive',
+      to: `/stockroom/purchase-orders/${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner'],
+    sql: `SELECT o.id, o.number, o.title, c.name AS customer, o.promised_on AS day, o.quantity AS extra
+      FROM customer_order o JOIN customer c ON c.id = o.customer_id
+      WHERE o.state IN ('packed', 'part shipped') ORDER BY o.promised_on LIMIT 5`,
+    say: (row, today) => ({
+      kind: 'ship',
+      title: 'Ship',
+      detail: `${row.extra ?? ''} ${row.title} for ${row.customer}`,
+      when: by('promised for', row.day),
+      late: past(row.day, today),
+      action: 'Ship',
+      to: `/counter/orders/${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner', 'bookkeeper'],
+    sql: `SELECT o.id, o.number, o.title, c.name AS customer, o.shipped_on AS day, NULL AS extra
+      FROM customer_order o JOIN customer c ON c.id = o.customer_id LEFT JOIN invoice i ON i.order_id = o.id
+      WHERE o.state IN ('packed', 'part shipped', 'shipped') AND (i.id IS NULL OR i.state = 'draft')
+      ORDER BY o.shipped_on, o.id LIMIT 6`,
+    say: (row) => ({
+      kind: 'invoice',
+      title: 'Invoice',
+      detail: `${row.title} for ${row.customer}, ${row.number}`,
+      when: by('shipped', row.day),
+      late: false,
+      action: 'Invoice',
+      to: `/books/invoices/new?order=${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner', 'bookkeeper'],
+    sql: `SELECT i.id, i.number, i.number AS title, c.name AS customer, i.due_on AS day,
+        printf('%.2f', (i.total - i.paid - i.credited) / 100.0) AS extra
+      FROM invoice i JOIN customer c ON c.id = i.customer_id
+      WHERE i.state IN ('issued', 'part paid') AND i.due_on < :today ORDER BY i.due_on LIMIT 6`,
+    say: (row) => ({
+      kind: 'remind',
+      title: 'Overdue',
+      detail: `${row.customer} owes ${row.extra ?? ''} on ${row.number}`,
+      when: by('was due', row.day),
+      late: true,
+      action: 'Look',
+      to: `/books/invoices/${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner'],
+    sql: `SELECT q.id, q.number, q.title, c.name AS customer, q.in_hands_on AS day, NULL AS extra
+      FROM quote q JOIN customer c ON c.id = q.customer_id
+      WHERE q.state = 'draft' ORDER BY q.in_hands_on IS NULL, q.in_hands_on, q.id LIMIT 4`,
+    say: (row, today) => ({
+      kind: 'answer',
+      title: 'Answer',
+      detail: `${row.title} for ${row.customer}, ${row.number}`,
+      when: by('in hands', row.day),
+      late: past(row.day, today),
+      action: 'Quote',
+      to: `/counter/quotes/${row.id}`,
+    }),
+  },
+  {
+    roles: ['owner'],
+    sql: `SELECT p.id, p.number, s.name AS title, s.name AS customer, NULL AS day, NULL AS extra
+      FROM purchase_order p JOIN supplier s ON s.id = p.supplier_id WHERE p.state = 'draft' ORDER BY p.id LIMIT 3`,
+    say: (row) => ({
+      kind: 'order',
+      title: 'Order',
+      detail: `${row.number} to ${row.customer} is ready to send`,
+      when: null,
+      late: false,
+      action: 'Look',
+      to: `/stockroom/purchase-orders/${row.id}`,
+    }),
+  },
+  {
+    roles: ['bookkeeper'],
+    sql: `SELECT 0 AS id, '' AS number, '' AS title, '' AS customer,
+        date(:today, 'start of month', '-1 month') AS day, date(:today, 'start of month', '-1 day') AS extra
+      WHERE EXISTS (SELECT 1 FROM posting
+          WHERE day BETWEEN date(:today, 'start of month', '-1 month') AND date(:today, 'start of month', '-1 day'))
+        AND NOT EXISTS (SELECT 1 FROM period WHERE to_day >= date(:today, 'start of month', '-1 day'))`,
+    say: (row) => ({
+      kind: 'lock',
+      title: 'Sales sheet',
+      detail: 'Last month is not locked yet',
+      when: by('up to', row.extra),
+      late: false,
+      action: 'Open',
+      to: `/books/sales-sheets?from=${row.day ?? ''}&to=${row.extra ?? ''}`,
+    }),
+  },
+];

@@ -1,0 +1,15 @@
+/** An amount or price as printed: its own decimals, thousands set apart. */
+export function printedNumber(text: string, digits: number): string {
+  const places = Math.max(digits, text.split('.')[1]?.replace(/0+$/, '').length ?? 0);
+  const format = new Intl.NumberFormat('en', {
+    minimumFractionDigits: places,
+    maximumFractionDigits: places,
+  });
+  return format.format(text as Intl.StringNumericLiteral);
+}
+
+/** A calendar day as printed: 14 December 2026. */
+export function printedDay(day: string): string {
+  const format = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' });
+  return format.format(new Date(`${day}T00:00:00Z`));
+}

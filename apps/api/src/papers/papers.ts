@@ -1,0 +1,6 @@
+import { drawInvoice } from './invoice-pdf.ts';
+import { drawQuote } from './quote-pdf.ts';
+
+/** What the program puts on paper: a snapshot in, bytes out. */
+export const papers = { quote: drawQuote, invoice: drawInvoice };
+export type Papers = typeof papers;

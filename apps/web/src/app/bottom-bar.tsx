@@ -1,0 +1,65 @@
+import { Menu } from '@base-ui/react/menu';
+import type { Role } from '@hidewright/contract';
+import { NavLink, useNavigate } from 'react-router-dom';
+import { menuLook } from './menu-look.ts';
+import { RoomIcon } from './room-icon.tsx';
+import { roomsFor } from './rooms.ts';
+
+const itemLook =
+  'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 rounded px-1 text-sm outline-offset-0!';
+
+/** On a phone: the rooms that the role uses most, the others behind More. */
+export function BottomBar({ role }: { role: Role }) {
+  const all = roomsFor(role);
+  const shown = all.filter((room) => room.bar.includes(role));
+  const others = all.filter((room) => !room.bar.includes(role));
+  return (
+    <nav aria-label="Rooms" className="no-print fixed inset-x-0 bottom-0 z-30 bg-card pb-[env(safe-area-inset-bottom)] md:hidden">
+      <div aria-hidden="true" className="stitched h-0.5" />
+      <ul className="flex px-1 py-1">
+        {shown.map((room) => (
+          <li key={room.path} className="flex-1">
+            <NavLink
+              to={room.path}
+              className={({ isActive }) =>
+                `${itemLook} ${isActive ? 'font-bold text-verdigris underline decoration-dashed decoration-2 underline-offset-4' : 'text-ink-soft'}`
+              }
+            >
+              <RoomIcon name={room.icon} size={22} />
+              {room.word}
+            </NavLink>
+          </li>
+        ))}
+        {others.length > 0 && (
+          <li className="flex-1">
+            <MoreRooms others={others} />
+          </li>
+        )}
+      </ul>
+    </nav>
+  );
+}
+
+function MoreRooms({ others }: { others: ReturnType<typeof roomsFor> }) {
+  const navigate = useNavigate();
+  return (
+    <Menu.Root>
+      <Menu.Trigger className={`${itemLook} text-ink-soft`}>
+        <RoomIcon name="more" size={22} />
+        More
+      </Menu.Trigger>
+      <Menu.Portal>
+        <Menu.Positioner sideOffset={10} align="end" collisionPadding={8} className="z-40 outline-none">
+          <Menu.Popup className={menuLook.popup}>
+            {others.map((room) => (
+              <Menu.Item key={room.path} className={menuLook.item} onClick={() => void navigate(room.path)}>
+                <RoomIcon name={room.icon} size={22} />
+                {room.word}
+              </Menu.Item>
+            ))}
+          </Menu.Popup>
+        </Menu.Positioner>
+      </Menu.Portal>
+    </Menu.Root>
+  );
+}

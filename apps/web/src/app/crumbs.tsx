@@ -1,0 +1,36 @@
+import { Fragment } from 'react';
+import { Link, useMatches } from 'react-router-dom';
+
+interface CrumbHandle {
+  /** This place's word, or how to tell it from what its loader gave. */
+  crumb: string | ((data: unknown) => string);
+}
+
+function hasCrumb(handle: unknown): handle is CrumbHandle {
+  return typeof handle === 'object' && handle !== null && 'crumb' in handle;
+}
+
+/** The way from the room to this place, from each route's `handle.crumb`. */
+export function Crumbs() {
+  const places = useMatches().flatMap(({ id, pathname, handle, loaderData }) => {
+    if (!hasCrumb(handle)) return [];
+    const { crumb } = handle;
+    return [{ id, pathname, word: typeof crumb === 'function' ? crumb(loaderData) : crumb }];
+  });
+  return (
+    <nav aria-label="Where you are" className="min-w-0 grow truncate text-sm text-ink-soft md:text-base">
+      {places.map((place, index) => (
+        <Fragment key={place.id}>
+          {index > 0 && <span aria-hidden="true"> / </span>}
+          {index === places.length - 1 ? (
+            <span aria-current="page">{place.word}</span>
+          ) : (
+            <Link to={place.pathname} className="rounded py-1.5 underline-offset-3 hover:text-ink hover:underline">
+              {place.word}
+            </Link>
+          )}
+        </Fragment>
+      ))}
+    </nav>
+  );
+}

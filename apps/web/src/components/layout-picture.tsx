@@ -1,0 +1,117 @@
+import { useId } from 'react';
+import { lengthFigure, lengthUnits } from '../lib/units.ts';
+import { useWorkshop } from '../lib/workshop.tsx';
+import { LayoutPiece } from './layout-piece.tsx';
+import { usePathBox } from './use-path-box.ts';
+
+export interface Placement {
+  x: number;
+  y: number;
+  /** Degrees, clockwise as drawn. */
+  rot: number;
+}
+
+interface LayoutPictureProps {
+  /** The outline as SVG path data in mm, about the point that placements move. */
+  outlinePath: string;
+  placements: readonly Placement[];
+  widthMm: number;
+  heightMm: number;
+  /** How many pieces the spoilage allowance will cost: the last ones are hatched. */
+  allowance?: number;
+  /** Along which side the backbone ran. */
+  spine?: 'across' | 'down';
+  /** What is drawn, for the ear: "Layout of Heron crest tags". */
+  title: string;
+  className?: string;
+}
+
+/** The real layout, to scale: people look at it before they read a number. */
+export function LayoutPicture(props: LayoutPictureProps) {
+  const { outlinePath, placements, widthMm, heightMm, allowance = 0, spine = 'across', title } = props;
+  const { lengthUnit } = useWorkshop();
+  const id = useId();
+  const [measure, box] = usePathBox(outlinePath);
+  const margin = Math.max(widthMm, heightMm) * 0.004;
+  const size = [widthMm, heightMm].map((side) => lengthFigure(String(side), lengthUnit)).join(' × ');
+  const sign = lengthUnits[lengthUnit].sign;
+  const firstHatched = placements.length - allowance;
+  const hatched = allowance > 0 ? `; ${allowance} hatched for the spoilage allowance` : '';
+  return (
+    <figure className={props.className}>
+      <svg
+        role="img"
+        aria-labelledby={`${id}-title ${id}-desc`}
+        viewBox={`${-margin} ${-margin} ${widthMm + 2 * margin} ${heightMm + 2 * margin}`}
+        className="block h-auto max-h-[30rem] w-full"
+      >
+        <title id={`${id}-title`}>{title}</title>
+        <desc id={`${id}-desc`}>
+          {`${placements.length} pieces from ${size} ${sign}${hatched}; the spine runs ${spine}.`}
+        </desc>
+        <defs>
+          <Hatch id={`${id}-hatch`} spacing={Math.max(box.width, box.height) / 14} />
+          <path ref={measure} id={`${id}-outline`} d={outlinePath} />
+        </defs>
+        <rect
+          width={widthMm}
+          height={heightMm}
+          className="fill-panel stroke-edge"
+          strokeWidth={1.5}
+          vectorEffect="non-scaling-stroke"
+        />
+        {placements.map((placement, index) => (
+          <LayoutPiece
+            key={index}
+            number={index + 1}
+            placement={placement}
+            outlineId={`${id}-outline`}
+            hatchId={index >= firstHatched ? `${id}-hatch` : undefined}
+            box={box}
+          />
+        ))}
+      </svg>
+      <figcaption className="mt-2 flex flex-wrap justify-between gap-x-6 text-ink-soft">
+        <span>{`${size} ${sign}`}</span>
+        <SpineArrow spine={spine} />
+      </figcaption>
+    </figure>
+  );
+}
+
+function Hatch({ id, spacing }: { id: string; spacing: number }) {
+  const step = spacing || 4;
+  return (
+    <pattern
+      id={id}
+      width={step}
+      height={step}
+      patternUnits="userSpaceOnUse"
+      patternTransform="rotate(35)"
+    >
+      <rect width={step} height={step} className="fill-card" />
+      <rect width={step * 0.45} height={step} className="fill-russet" />
+    </pattern>
+  );
+}
+
+function SpineArrow({ spine }: { spine: 'across' | 'down' }) {
+  return (
+    <span className="inline-flex items-center gap-2">
+      along the spine
+      <svg
+        width={spine === 'across' ? 80 : 12}
+        height={spine === 'across' ? 12 : 40}
+        viewBox={spine === 'across' ? '0 0 80 12' : '0 0 12 40'}
+        fill="none"
+        stroke="currentColor"
+        strokeWidth="1.6"
+        strokeLinecap="round"
+        strokeLinejoin="round"
+        aria-hidden="true"
+      >
+        <path d={spine === 'across' ? 'M1 6h76M71 2l7 4-7 4' : 'M6 1v36M2 31l4 7 4-7'} />
+      </svg>
+    </span>
+  );
+}

@@ -1,0 +1,49 @@
+import { ChevronDown } from 'lucide-react';
+import { describedBy, Field, type FieldLabels } from './field.tsx';
+import { InputFrame, inputLook } from './input-frame.tsx';
+import { emptied, useField, type WhenEmpty } from './use-field.ts';
+
+export interface Choice {
+  value: string | number;
+  label: string;
+}
+
+interface SelectFieldProps extends FieldLabels {
+  name: string;
+  choices: readonly Choice[];
+  /** Shown while nothing is chosen: "Choose a leather". */
+  placeholder?: string;
+  whenEmpty?: WhenEmpty;
+  short?: boolean;
+}
+
+/** One of several, with the device's own list. Numbers among the values stay numbers. */
+export function SelectField(props: SelectFieldProps) {
+  const { name, choices, placeholder, whenEmpty = 'absent', short, ...labels } = props;
+  const { id, register, error } = useField(name);
+  const read = (value: unknown) =>
+    value === '' || value === undefined || value === null
+      ? emptied(whenEmpty)
+      : (choices.find((choice) => String(choice.value) === String(value))?.value ?? value);
+  return (
+    <Field id={id} error={error} {...labels}>
+      <InputFrame id={id} short={short} invalid={error !== undefined}>
+        <select
+          {...register(name, { setValueAs: read })}
+          id={id}
+          aria-invalid={error !== undefined}
+          aria-describedby={describedBy(id, { help: labels.help, error })}
+          className={`${inputLook} -mr-8 appearance-none pr-9`}
+        >
+          {placeholder !== undefined && <option value="">{placeholder}</option>}
+          {choices.map((choice) => (
+            <option key={choice.value} value={choice.value} className="bg-card text-ink">
+              {choice.label}
+            </option>
+          ))}
+        </select>
+        <ChevronDown size={18} aria-hidden="true" className="pointer-events-none mr-2.5 shrink-0" />
+      </InputFrame>
+    </Field>
+  );
+}

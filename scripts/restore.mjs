@@ -1,0 +1,3 @@
+import { launchApiProgram, pathArguments } from './workspace/launch.mjs';
+
+await launchApiProgram('restore.ts', pathArguments());

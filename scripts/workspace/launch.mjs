@@ -1,0 +1,36 @@
+import path from 'node:path';
+import { ensureInstalled } from './installed.mjs';
+import { inRoot } from './paths.mjs';
+import { become } from './run.mjs';
+
+/** Settings that name a file or a folder; a relative one is meant from where the person stands. */
+const pathSettings = ['DATA_DIR', 'TLS_CERT', 'TLS_KEY', 'CHECKS_DIR'];
+
+export function withAbsolutePaths(env = process.env) {
+  const absolute = { ...env };
+  for (const name of pathSettings) {
+    if (absolute[name]) absolute[name] = path.resolve(absolute[name]);
+  }
+  return absolute;
+}
+
+/** tsx reads the compiler options of the folder it is started in, so each program starts in its own. */
+export const apiFolder = inRoot('apps', 'api');
+
+export function apiProgram(file) {
+  return ['--import', 'tsx', path.join('src', file)];
+}
+
+/** Installs when needed, then becomes one of the API's programs, with a data folder as its argument. */
+export async function launchApiProgram(file, args) {
+  await ensureInstalled();
+  become(process.execPath, [...apiProgram(file), ...args], {
+    cwd: apiFolder,
+    env: withAbsolutePaths(),
+  });
+}
+
+/** Arguments that are not options are files or folders, seen from where the person stands. */
+export function pathArguments(args = process.argv.slice(2)) {
+  return args.map((arg) => (arg.startsWith('-') ? arg : path.resolve(arg)));
+}

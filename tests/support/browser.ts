@@ -1,0 +1,82 @@
+import { existsSync } from 'node:fs';
+import { AxeBuilder } from '@axe-core/playwright';
+import { chromium, type Browser, type Page } from 'playwright-core';
+import { expect, test } from 'vitest';
+
+const usual = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome'];
+
+/** A sandbox cannot be made as root, and nothing but the page under test should reach the network. */
+const flags = [
+  '--no-sandbox',
+  '--disable-gpu',
+  '--disable-quic',
+  '--no-first-run',
+  '--disable-background-networking',
+  '--disable-component-update',
+  '--disable-sync',
+];
+
+let running: Promise<Browser> | undefined;
+
+/** One browser for all tests of a file. */
+export function browser(): Promise<Browser> {
+  running ??= launch();
+  return running;
+}
+
+export async function closeBrowser(): Promise<void> {
+  await (await running)?.close();
+  running = undefined;
+}
+
+function launch(): Promise<Browser> {
+  const executablePath = [process.env['CHROMIUM'], ...usual].find((file) => file && existsSync(file));
+  if (executablePath === undefined) {
+    throw new Error('Chromium is not installed. On Debian: apt-get install chromium');
+  }
+  return chromium.launch({ executablePath, args: flags, headless: true });
+}
+
+/** Whatever a page complains of: errors in its console, thrown ones, and breaches of its security policy. */
+export function watch(page: Page): string[] {
+  const complaints: string[] = [];
+  page.on('console', (message) => {
+    if (message.type() === 'error') complaints.push(`${message.text()} (${message.location().url})`);
+  });
+  page.on('pageerror', (error) => complaints.push(error.message));
+  return complaints;
+}
+
+export const wide = { width: 1440, height: 900 };
+export const phone = { width: 390, height: 844 };
+
+interface Walk {
+  /** What the page has complained of; a test that provokes a complaint takes it out. */
+  complaints: string[];
+  page: Page;
+}
+
+/** A test with a page of its own, which fails when the page complained of anything. */
+export const walk = test.extend<Walk>({
+  complaints: async ({}, use) => use([]),
+  page: async ({ complaints }, use) => {
+    const context = await (await browser()).newContext({ viewport: wide });
+    const page = await context.newPage();
+    const heard = watch(page);
+    await use(page);
+    complaints.push(...heard);
+    await context.close();
+    expect(complaints, 'the page complained').toEqual([]);
+  },
+});
+
+/** Fails with what axe finds against WCAG 2.2 AA on the page as it stands. */
+export async function expectAccessible(page: Page): Promise<void> {
+  const { violations } = await new AxeBuilder({ page }).analyze();
+  const findings = violations.map(({ id, help, nodes }) => ({
+    id,
+    help,
+    where: nodes.slice(0, 3).map((node) => node.target.join(' ')),
+  }));
+  expect(findings, page.url()).toEqual([]);
+}
