@@ -34,6 +34,7 @@ export default defineConfig({
       'apps/*/vitest.config.ts',
       whole('e2e', 'tests/e2e', '**/*.e2e.ts'),
       whole('commands', 'tests/commands', '**/*.test.ts'),
+      whole('sheets', 'tests/sheets', '**/*.test.ts'),
       whole('drills', 'tests/drills', '**/*.drill.ts'),
     ],
   },

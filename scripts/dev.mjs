@@ -1,6 +1,7 @@
 import { ensureInstalled } from './workspace/installed.mjs';
 import { apiFolder, withAbsolutePaths } from './workspace/launch.mjs';
 import { startMailbox } from './workspace/mailbox.mjs';
+import { watchParent } from './workspace/parent.mjs';
 import { inRoot } from './workspace/paths.mjs';
 import { startService } from './workspace/service.mjs';
 import { readSettings } from './workspace/settings.mjs';
@@ -15,6 +16,7 @@ async function end(code) {
   process.exit(code);
 }
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0));
+watchParent(() => void end(0));
 
 const show = { onLine: (line) => console.log(line), onErrorLine: (line) => console.error(line) };
 const env = {

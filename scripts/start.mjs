@@ -3,6 +3,7 @@ import { apiFolder, apiProgram, withAbsolutePaths } from './workspace/launch.mjs
 import { openLog } from './workspace/log-file.mjs';
 import { startMailbox } from './workspace/mailbox.mjs';
 import { untilHealthy } from './workspace/healthy.mjs';
+import { watchParent } from './workspace/parent.mjs';
 import { startService } from './workspace/service.mjs';
 import { readSettings, reachable, SettingError } from './workspace/settings.mjs';
 import { ensureWebBuilt } from './workspace/web-build.mjs';
@@ -60,6 +61,7 @@ async function start() {
   await ensureInstalled();
   await ensureWebBuilt();
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0));
+  watchParent(() => void end(0));
 
   const mailbox =
     settings.mode === 'demo' && !process.env.SMTP_URL

@@ -17,7 +17,10 @@ export default defineConfig(({ mode }) => {
           codeSplitting: {
             groups: [
               // One chunk, so that zod is told to do without eval before the first schema is made.
-              { name: 'contract', test: /node_modules\/zod\/|packages\/contract\/|lib\/zod-without-eval/ },
+              {
+                name: 'contract',
+                test: /node_modules\/zod\/|packages\/contract\/|lib\/zod-without-eval/,
+              },
             ],
           },
         },

@@ -27,7 +27,11 @@ function steps() {
       name: `types of ${folder}`,
       args: [
         ...[program('typescript', 'tsc'), '-p', folder, '--pretty', 'false'],
-        ...['--incremental', '--tsBuildInfoFile', inRoot('.cache', 'types', `${folder}.tsbuildinfo`)],
+        ...[
+          '--incremental',
+          '--tsBuildInfoFile',
+          inRoot('.cache', 'types', `${folder}.tsbuildinfo`),
+        ],
       ],
     }));
   return [

@@ -5,11 +5,11 @@ import { createInterface } from 'node:readline';
 const patience = 15_000;
 
 /**
- * A program that keeps running beside this one. Its lines are handed to `onLine` and `onErrorLine`;
+ * A program that keeps running beside this one; over its channel it notices when this one is gone. Its lines are handed to `onLine` and `onErrorLine`;
  * `ended` resolves with its exit code.
  */
 export function startService(command, args, { cwd, env, onLine, onErrorLine }) {
-  const child = spawn(command, args, { cwd, env, stdio: ['ignore', 'pipe', 'pipe'] });
+  const child = spawn(command, args, { cwd, env, stdio: ['ignore', 'pipe', 'pipe', 'ipc'] });
   createInterface({ input: child.stdout }).on('line', onLine);
   createInterface({ input: child.stderr }).on('line', onErrorLine);
   const ended = new Promise((resolve) => {

@@ -26,7 +26,7 @@ export async function buildWeb() {
   const vite = inRoot('apps', 'web', 'node_modules', 'vite', 'bin', 'vite.js');
   const { code, output } = await run(process.execPath, [vite, 'build', '--logLevel', 'warn'], {
     cwd: web,
-    env: { ...process.env, NODE_ENV: 'production' },
+    env: { ...process.env, NODE_ENV: 'production', NO_COLOR: '1' },
   });
   if (code === 0 && existsSync(inRoot('apps', 'web', 'dist'))) writeStamp(stampFile, wanted);
   return { code, output, seconds: (performance.now() - began) / 1000 };

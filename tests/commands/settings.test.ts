@@ -19,7 +19,9 @@ test('a port in use is said in one sentence, with what to do', async () => {
   const { code, said } = await outcome([], { PORT: String(port) });
   other.close();
   expect(code).toBe(1);
-  expect(said).toContain(`Port ${port} is in use on 127.0.0.1. Stop what uses it, or choose another`);
+  expect(said).toContain(
+    `Port ${port} is in use on 127.0.0.1. Stop what uses it, or choose another`,
+  );
   expect(said.trim().split('\n')).toHaveLength(1);
 });
 

@@ -30,7 +30,9 @@ export async function closeBrowser(): Promise<void> {
 }
 
 function launch(): Promise<Browser> {
-  const executablePath = [process.env['CHROMIUM'], ...usual].find((file) => file && existsSync(file));
+  const executablePath = [process.env['CHROMIUM'], ...usual].find(
+    (file) => file && existsSync(file),
+  );
   if (executablePath === undefined) {
     throw new Error('Chromium is not installed. On Debian: apt-get install chromium');
   }
@@ -41,7 +43,8 @@ function launch(): Promise<Browser> {
 export function watch(page: Page): string[] {
   const complaints: string[] = [];
   page.on('console', (message) => {
-    if (message.type() === 'error') complaints.push(`${message.text()} (${message.location().url})`);
+    if (message.type() === 'error')
+      complaints.push(`${message.text()} (${message.location().url})`);
   });
   page.on('pageerror', (error) => complaints.push(error.message));
   return complaints;

@@ -5,6 +5,7 @@ import { pino, type Logger } from 'pino';
 import { databaseFile, type Config } from './config.ts';
 import { assertSound } from './db/sound.ts';
 import { ormConfig } from './mikro-orm.config.ts';
+import { Workshop } from './modules/workshop/workshop.entity.ts';
 import { systemClock, type Clock } from './outside/clock.ts';
 import { FileStore } from './outside/file-store.ts';
 import { connectMail, type Mailer } from './outside/mailer.ts';
@@ -24,11 +25,16 @@ export interface Context {
 }
 
 /** Opens the data folder and what lies in it; `clock` is the system's unless a test or the demo brings its own. */
-export async function createContext(config: Config, clock: Clock = systemClock): Promise<Context> {
+export async function createContext(
+  config: Config,
+  clock: Clock = systemClock,
+  synchronous: 'FULL' | 'OFF' = 'FULL',
+): Promise<Context> {
   await mkdir(config.dataDir, { recursive: true });
-  const orm = await MikroORM.init(ormConfig(databaseFile(config.dataDir)));
+  const orm = await MikroORM.init(ormConfig(databaseFile(config.dataDir), synchronous));
   await orm.getMigrator().up();
   await assertSound(orm);
+  await assertMode(orm, config);
   return {
     config,
     orm,
@@ -39,6 +45,15 @@ export async function createContext(config: Config, clock: Clock = systemClock):
     papers,
     workers: startWorkers(config),
   };
+}
+
+/** A demo workshop is never opened as a shop, nor the other way round. */
+async function assertMode(orm: MikroORM, { mode, dataDir }: Config): Promise<void> {
+  const workshop = await orm.em.fork().findOne(Workshop, 1);
+  if (workshop === null || workshop.mode === mode) return;
+  await orm.close(true);
+  const other = workshop.mode === 'demo' ? 'the demo workshop' : 'a real shop';
+  throw new Error(`${dataDir} holds ${other}. Start it as that, or set DATA_DIR to another folder.`);
 }
 
 export async function closeContext(context: Context): Promise<void> {

@@ -1,16 +1,21 @@
 import { createApp } from './app.ts';
+import { startLapsing } from './background/lapsing.ts';
+import { startOutbox } from './background/outbox.ts';
 import { readConfig } from './config.ts';
 import { closeContext, createContext } from './context.ts';
 import { listen } from './http/listen.ts';
+import { makeDemo } from './seeders/demo/make-demo.ts';
 
 async function start(): Promise<void> {
   const config = readConfig(process.env);
+  if (config.mode === 'demo') await makeDemo(config);
   const context = await createContext(config);
   const server = await listen(await createApp(context), config);
+  const background = [startOutbox(context), startLapsing(context)];
   context.log.info({ port: server.port, host: config.host, mode: config.mode }, 'listening');
   for (const signal of ['SIGINT', 'SIGTERM'] as const) {
     process.once(signal, () => {
-      void server.close().then(() => closeContext(context));
+      void Promise.all([server.close(), ...background.map((each) => each.stop())]).then(() => closeContext(context));
     });
   }
 }

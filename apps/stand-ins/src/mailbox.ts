@@ -20,8 +20,9 @@ async function end() {
   process.exit(0);
 }
 let ending = false;
-for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
-  process.on(signal, () => {
+// The launcher's channel closes when the launcher is gone, however it ended.
+for (const event of ['SIGINT', 'SIGTERM', 'SIGHUP', 'disconnect'] as const) {
+  process.on(event, () => {
     if (!ending) void end();
     ending = true;
   });

@@ -1,4 +1,5 @@
 import * as activity from './activity.ts';
+import * as benchHours from './bench-hours.ts';
 import * as customers from './customers.ts';
 import type { Endpoint } from './endpoint.ts';
 import * as hardware from './hardware.ts';
@@ -40,6 +41,7 @@ const rooms: Record<string, unknown>[] = [
   layouts,
   tools,
   jobs,
+  benchHours,
   leathers,
   lots,
   hardware,

@@ -19,10 +19,10 @@ export const signedMoney = decimalText(13, 2, '-3.20', 'Enter an amount such as 
 /** A price or cost of one piece, foot or hour: at most four decimals. */
 export const unitPrice = decimalText(9, 4, '4.2', 'Enter a price such as 0.17, not negative, with at most four decimals.');
 /** An area in mm², to a thousandth. */
-export const areaMm2 = decimalText(12, 3, '1858060.8', 'Enter an area in mm², above zero, with at most three decimals.');
+export const areaMm2 = decimalText(12, 3, '1858060.8', 'Enter an area such as 24.75, 24¾ or 24³.');
 export const signedAreaMm2 = decimalText(12, 3, '-92903.04', 'Enter an area in mm², with at most three decimals.', true);
 /** A length in mm, to a millionth, so that a 64th of an inch is exact. */
-export const lengthMm = decimalText(6, 6, '279.4', 'Enter a length in mm, not negative, with at most six decimals.');
+export const lengthMm = decimalText(6, 6, '279.4', 'Enter a length such as 95 or 4 3/8.');
 /** A share in per cent, 0 to 100. */
 export const percent = decimalText(3, 4, '10', 'Enter a percentage from 0 to 100.').refine(
   (text) => Number(text) <= 100,
@@ -39,6 +39,8 @@ export const count = z.int(wholeNumber).min(0, 'Enter 0 or more.').max(10_000_00
 export const positiveCount = z.int(wholeNumber).min(1, 'Enter 1 or more.').max(10_000_000, 'That is too many.');
 export const runQuantity = z.int(wholeNumber).min(1, 'Enter 1 or more pieces.').max(100_000, 'Enter at most 100,000 pieces.');
 export const id = z.int().positive();
+/** The id of something that a person chooses from a list. */
+export const choice = (sentence: string) => z.int(sentence).positive(sentence);
 export const version = z.int().positive();
 
 /** A number of a paper, such as Q-0241. */

@@ -1,17 +1,27 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { count, id, idParams, line, page, pageQuery, positiveCount, unitPrice, version } from './fields.ts';
+import {
+  count,
+  id,
+  idParams,
+  line,
+  page,
+  pageQuery,
+  positiveCount,
+  unitPrice,
+  version,
+} from './fields.ts';
 
 export const hardwareKinds = ['hardware', 'supplies'] as const;
 
 const typed = {
   name: line(80, 'Enter a name, such as Copper rivet 9 mm.'),
-  kind: z.enum(hardwareKinds, 'Choose hardware or supplies.').default('hardware'),
+  kind: z.enum(hardwareKinds, 'Choose hardware or supplies.'),
   unitPrice,
-  packSize: positiveCount.default(1),
-  reorderAt: count.default(0),
-  supplierId: id.nullable().default(null),
+  packSize: positiveCount,
+  reorderAt: count,
+  supplierId: id.nullable(),
 };
 
 export const hardware = z
@@ -68,7 +78,13 @@ export const addHardware = endpoint({
   summary: 'Add hardware or supplies',
   access: ['owner'],
   creates: true,
-  body: z.strictObject(typed),
+  body: z.strictObject({
+    ...typed,
+    kind: typed.kind.default('hardware'),
+    packSize: typed.packSize.default(1),
+    reorderAt: typed.reorderAt.default(0),
+    supplierId: typed.supplierId.default(null),
+  }),
   reply: hardware,
 });
 
@@ -79,6 +95,6 @@ export const changeHardware = endpoint({
   access: ['owner'],
   edits: true,
   params: idParams,
-  body: z.strictObject({ ...typed, active: z.boolean().default(true) }).partial(),
+  body: z.strictObject({ ...typed, active: z.boolean() }).partial(),
   reply: hardware,
 });

@@ -1,4 +1,5 @@
 export * from './activity.ts';
+export * from './bench-hours.ts';
 export * from './confidential.ts';
 export * from './customers.ts';
 export * from './endpoint.ts';

@@ -150,6 +150,7 @@ const compared = z.object({
   what: z.string(),
   unit: z.enum(['mm2', 'pieces', 'minutes', 'percent', 'money']),
   estimate: z.string(),
+  /** Null where nothing was logged that could say it. */
   fact: z.string().nullable(),
 });
 export type Compared = z.infer<typeof compared>;
@@ -162,30 +163,6 @@ export const jobComparison = z
   })
   .meta({ id: 'JobComparison' });
 export type JobComparison = z.infer<typeof jobComparison>;
-
-/** One day of the bench: what there is, and what open jobs will need of it, earliest promise first. */
-const benchDay = z
-  .object({
-    day,
-    minutes: z.string(),
-    planned: z.array(z.object({ jobId: id, number: paperNumber, title: z.string(), minutes: z.string() })),
-    /** Logged already on that day. */
-    loggedMinutes: z.string(),
-    freeMinutes: z.string(),
-    /** Jobs promised for that day. */
-    promised: z.array(z.object({ jobId: id, number: paperNumber, title: z.string() })),
-  })
-  .meta({ id: 'BenchDay' });
-export type BenchDay = z.infer<typeof benchDay>;
-
-export const benchHours = z
-  .object({
-    days: z.array(benchDay),
-    /** Jobs that cannot be done by their promised day at the shop's hours. */
-    late: z.array(z.object({ jobId: id, number: paperNumber, title: z.string(), promisedOn: day, minutesShort: z.string() })),
-  })
-  .meta({ id: 'BenchHours' });
-export type BenchHours = z.infer<typeof benchHours>;
 
 const bench = ['owner', 'maker'] as const;
 const someArea = areaMm2.refine((text) => Number(text) > 0, 'Enter an area above 0.');
@@ -258,7 +235,7 @@ export const finishJob = endpoint({
     good: positiveCount,
     seconds: count.default(0),
     leatherLeft: z.array(z.strictObject({ lotId: id, areaMm2 })).max(50).default([]),
-    hardwareLeft: z.array(z.strictObject({ hardwareId: id, quantity: positiveCount })).max(50).default([]),
+    hardwareLeft: z.array(z.strictObject({ hardwareId: id, quantity: count })).max(50).default([]),
   }),
   reply: job,
 });
@@ -292,13 +269,4 @@ export const compareJob = endpoint({
   access: bench,
   params: idParams,
   reply: jobComparison,
-});
-
-export const readBenchHours = endpoint({
-  method: 'GET',
-  path: '/bench-hours',
-  summary: 'The calendar of bench hours: each day’s hours and which job will need them',
-  access: bench,
-  query: z.strictObject({ days: z.coerce.number().int().min(1).max(60).default(14) }),
-  reply: benchHours,
 });

@@ -3,12 +3,12 @@ import { DomainError, InvalidInput, checkOutline } from '@hidewright/domain';
 import { endpoint } from './endpoint.ts';
 import { id, idParams, lengthMm, positiveCount } from './fields.ts';
 import { outlineOf } from './layout-asked.ts';
+import { onceSound } from './once-sound.ts';
 
 /** A length within limits, with a sentence that names it. */
 function length(word: string, min: number, max: number) {
   const sentence = `Enter the ${word}: ${min} to ${max} mm.`;
-  // What is below zero has had its sentence already.
-  return lengthMm.refine((text) => Number(text) < 0 || (Number(text) >= min && Number(text) <= max), sentence);
+  return lengthMm.refine((text) => Number(text) >= min && Number(text) <= max, onceSound(sentence));
 }
 
 const side = (word: string) => length(word, 1, 5000);
@@ -39,6 +39,7 @@ export const outline = z
     'Choose round, rectangle, oval or tag.',
   )
   .superRefine((typed, context) => {
+    if (context.issues.length > 0) return;
     try {
       checkOutline(outlineOf(typed));
     } catch (error) {

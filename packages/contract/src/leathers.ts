@@ -25,7 +25,13 @@ export const leather = z
     weightHighOz: z.string().nullable(),
     pricePerFt2: confidential(z.string()),
     supplierId: id.nullable(),
+    supplierName: z.string().nullable(),
     active: z.boolean(),
+    /** Of all its lots together. */
+    onHandAreaMm2: z.string(),
+    freeAreaMm2: z.string(),
+    /** Ordered from suppliers and not here yet. */
+    onOrderAreaMm2: z.string(),
     version,
   })
   .meta({ id: 'Leather' });

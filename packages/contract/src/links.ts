@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
-import { day, instant, paperNumber, runQuantity } from './fields.ts';
+import { day, paperNumber, runQuantity } from './fields.ts';
 
-const tokenParams = z.strictObject({ token: z.string().regex(/^[A-Za-z0-9_-]{20,100}$/) });
+const tokenParams = z.strictObject({ token: z.string().min(1).max(200) });
 
 /** A quote as its customer reads it: what is offered, at what price, and nothing of what it costs the shop. */
 export const offer = z
@@ -25,7 +25,7 @@ export const offer = z
     tooling: z.array(z.object({ name: z.string(), charge: z.string() })),
     toolingTotal: z.string(),
     agreedQuantity: runQuantity.nullable(),
-    agreedAt: instant.nullable(),
+    agreedOn: day.nullable(),
   })
   .meta({ id: 'Offer' });
 export type Offer = z.infer<typeof offer>;

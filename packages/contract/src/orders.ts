@@ -28,7 +28,7 @@ const checkAnswer = z
     about: z.enum(['leather', 'hardware', 'tooling', 'hours']),
     /** What it is about: a leather, a kind of rivet, the cutting die, the bench. */
     name: z.string(),
-    unit: z.enum(['mm2', 'pieces', 'uses', 'minutes']),
+    unit: z.enum(['mm2', 'piece', 'strike', 'minute']),
     /** Exact decimals in the unit. */
     needed: z.string(),
     free: z.string(),

@@ -3,6 +3,7 @@ import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import {
   areaMm2,
+  choice,
   day,
   id,
   idParams,
@@ -16,25 +17,45 @@ import {
   version,
 } from './fields.ts';
 
-export const purchaseOrderStates = ['draft', 'sent', 'part received', 'received', 'cancelled'] as const;
+export const purchaseOrderStates = [
+  'draft',
+  'sent',
+  'part received',
+  'received',
+  'cancelled',
+] as const;
 export type PurchaseOrderState = (typeof purchaseOrderStates)[number];
 
-const orderedArea = areaMm2.refine((text) => Number(text) > 0, 'Enter an area above zero.');
+/** Up to 100,000 ft². */
+const orderedArea = areaMm2.refine(
+  (text) => Number(text) > 0 && Number(text) <= 9_290_304_000,
+  'Enter an area above zero, and at most 100,000 ft².',
+);
 
 const typedLine = z.discriminatedUnion(
   'of',
   [
-    z.strictObject({ of: z.literal('leather'), leatherId: id, areaMm2: orderedArea, unitPrice }),
-    z.strictObject({ of: z.literal('hardware'), hardwareId: id, quantity: positiveCount, unitPrice }),
+    z.strictObject({
+      of: z.literal('leather'),
+      leatherId: choice('Choose a leather.'),
+      areaMm2: orderedArea,
+      unitPrice,
+    }),
+    z.strictObject({
+      of: z.literal('hardware'),
+      hardwareId: choice('Choose hardware or supplies.'),
+      quantity: positiveCount,
+      unitPrice,
+    }),
   ],
   'Choose a leather, or hardware.',
 );
 export type PurchaseLineTyped = z.output<typeof typedLine>;
 
 const typed = {
-  supplierId: id,
-  expectedOn: day.nullable().default(null),
-  note: paragraph(2000).default(''),
+  supplierId: choice('Choose a supplier.'),
+  expectedOn: day.nullable(),
+  note: paragraph(2000),
   lines: z
     .array(typedLine)
     .min(1, 'Add a line: what do you order?')
@@ -112,7 +133,11 @@ export const addPurchaseOrder = endpoint({
   summary: 'Draft an order to a supplier',
   access: ['owner'],
   creates: true,
-  body: z.strictObject(typed),
+  body: z.strictObject({
+    ...typed,
+    expectedOn: typed.expectedOn.default(null),
+    note: typed.note.default(''),
+  }),
   reply: purchaseOrder,
 });
 

@@ -138,8 +138,9 @@ export const quote = z
     /** The snapshot it is priced from, whole. */
     input: confidential(domainRecord<RunInput>('RunInput')),
     numbers: confidential(domainRecord<RunNumbers>('RunNumbers')),
-    /** Whether the customer has an e-mail address. */
-    canMail: z.boolean(),
+    customerEmail: confidential(z.string()),
+    /** Why it cannot go by mail, and what to do; null where it can. */
+    cannotMail: confidential(z.string().nullable()),
     letter: letter.nullable(),
     /** The link that is open for the customer now. */
     link: z.object({ expiresAt: instant }).nullable(),
@@ -193,7 +194,6 @@ export const runBasis = z
     needsPlate: z.boolean(),
     /** Complete but for what is typed on the quote: its breaks are an example, its tooling is empty. */
     input: domainRecord<RunInput>('RunInput'),
-    mailAvailable: z.boolean(),
   })
   .meta({ id: 'RunBasis' });
 export type RunBasis = z.infer<typeof runBasis>;
@@ -228,13 +228,18 @@ export const changeQuote = endpoint({
   reply: quote,
 });
 
+const by = z.enum(['mail', 'hand'], 'Choose how it goes out: mail or hand.');
+
 /** A link is told once, to who made it: only its hash is kept, so no reply that holds one is kept for replay either. */
-const handedOver = z.object({
-  quote,
-  linkUrl: z.string(),
-  /** To copy into whatever reaches the customer. */
-  text: z.string(),
-});
+const sentQuote = z
+  .object({
+    quote,
+    linkUrl: z.string(),
+    /** To copy into whatever reaches the customer. */
+    text: z.string(),
+  })
+  .meta({ id: 'SentQuote' });
+export type SentQuote = z.infer<typeof sentQuote>;
 
 export const sendQuote = endpoint({
   method: 'POST',
@@ -243,23 +248,24 @@ export const sendQuote = endpoint({
   access: ['owner'],
   edits: true,
   params: idParams,
-  body: z.strictObject({ by: z.enum(['mail', 'hand'], 'Choose how it goes out: mail or hand.') }),
-  reply: handedOver.meta({ id: 'SentQuote' }),
+  body: z.strictObject({ by }),
+  reply: sentQuote,
 });
 
 export const renewLink = endpoint({
   method: 'POST',
   path: '/quotes/{id}/links',
-  summary: 'A new link for the customer; the one before stops working',
+  summary: 'One more link for the customer of a quote that is out, by mail or by hand',
   access: ['owner'],
   params: idParams,
-  reply: handedOver,
+  body: z.strictObject({ by }),
+  reply: sentQuote,
 });
 
 export const revokeLink = endpoint({
   method: 'DELETE',
   path: '/quotes/{id}/links',
-  summary: 'Stop the customer’s link',
+  summary: 'Stop the customer’s links',
   access: ['owner'],
   params: idParams,
   reply: quote,

@@ -3,6 +3,7 @@ import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import {
   areaMm2,
+  choice,
   count,
   day,
   id,
@@ -70,20 +71,25 @@ export const listReservations = endpoint({
   path: '/reservations',
   summary: 'What is held for jobs',
   access: everybody,
-  query: pageQuery.omit({ q: true }).extend({ lotId: idQuery, hardwareId: idQuery, jobId: idQuery }),
+  query: pageQuery
+    .omit({ q: true })
+    .extend({ lotId: idQuery, hardwareId: idQuery, jobId: idQuery }),
   reply: page(stockReservation),
 });
 
 const aboveZero = (text: string) => Number(text) > 0;
+const fitsARack = (text: string) => Number(text) <= 9_290_304_000;
 const side = lengthMm.refine(aboveZero, 'Enter a length above zero, or leave it empty.');
 
 const receivedLot = z.strictObject({
-  leatherId: id,
+  leatherId: choice('Choose a leather.'),
   purchaseLineId: id.nullable().default(null),
   /** Left empty, the next number is drawn. */
   tag: optionalLine(30).default(''),
   form: z.enum(lotForms, 'Choose the form that it came in.'),
-  measuredAreaMm2: areaMm2.refine(aboveZero, 'Enter the area as measured, above zero.'),
+  measuredAreaMm2: areaMm2
+    .refine(aboveZero, 'Enter the area as measured, above zero.')
+    .refine(fitsARack, 'That is more than a rack holds: enter at most 100,000 ft².'),
   pieces: positiveCount.max(10_000, 'A bundle holds at most 10,000 pieces.').default(1),
   widthMm: side.nullable().default(null),
   heightMm: side.nullable().default(null),
@@ -97,7 +103,7 @@ const receivedLot = z.strictObject({
 export type ReceivedLot = z.output<typeof receivedLot>;
 
 const receivedHardware = z.strictObject({
-  hardwareId: id,
+  hardwareId: choice('Choose hardware or supplies.'),
   purchaseLineId: id.nullable().default(null),
   quantity: positiveCount,
   cost: money.nullable().default(null),
@@ -120,7 +126,11 @@ export const receiveDelivery = endpoint({
     /** What is still open of the order will not come. */
     nothingMore: z.boolean().default(false),
   }),
-  reply: z.object({ lots: z.array(lot), hardware: z.array(hardware), purchaseOrder: purchaseOrder.nullable() }),
+  reply: z.object({
+    lots: z.array(lot),
+    hardware: z.array(hardware),
+    purchaseOrder: purchaseOrder.nullable(),
+  }),
 });
 
 const reason = line(200, 'Say why, in a few words, such as counted on the shelf.');
@@ -134,7 +144,12 @@ export const adjustStock = endpoint({
   body: z.discriminatedUnion(
     'of',
     [
-      z.strictObject({ of: z.literal('lot'), lotId: id, areaMm2, reason }),
+      z.strictObject({
+        of: z.literal('lot'),
+        lotId: id,
+        areaMm2: areaMm2.refine(fitsARack, 'Enter at most 100,000 ft².'),
+        reason,
+      }),
       z.strictObject({ of: z.literal('hardware'), hardwareId: id, counted: count, reason }),
     ],
     'Choose a lot, or hardware.',

@@ -1,13 +1,29 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
-import { email, id, idParams, line, optionalLine, page, pageQuery, paragraph, version } from './fields.ts';
+import {
+  email,
+  id,
+  idParams,
+  line,
+  optionalLine,
+  page,
+  pageQuery,
+  paragraph,
+  version,
+} from './fields.ts';
 
 const typed = {
   name: line(80, 'Enter the supplier’s name.'),
-  email: z.union([z.literal(''), email], 'Enter an e-mail address such as name@example.com, or leave it empty.').default(''),
-  phone: optionalLine(40).default(''),
-  leadDays: z.int('Enter whole days.').min(0, 'Enter 0 days or more.').max(365, 'Enter at most 365 days.').default(7),
-  note: paragraph(2000).default(''),
+  email: z.union(
+    [z.literal(''), email],
+    'Enter an e-mail address such as name@example.com, or leave it empty.',
+  ),
+  phone: optionalLine(40),
+  leadDays: z
+    .int('Enter whole days.')
+    .min(0, 'Enter 0 days or more.')
+    .max(365, 'Enter at most 365 days.'),
+  note: paragraph(2000),
 };
 
 export const supplier = z
@@ -50,7 +66,13 @@ export const addSupplier = endpoint({
   summary: 'Add a supplier',
   access: ['owner'],
   creates: true,
-  body: z.strictObject(typed),
+  body: z.strictObject({
+    ...typed,
+    email: typed.email.default(''),
+    phone: typed.phone.default(''),
+    leadDays: typed.leadDays.default(7),
+    note: typed.note.default(''),
+  }),
   reply: supplier,
 });
 
@@ -61,6 +83,6 @@ export const changeSupplier = endpoint({
   access: ['owner'],
   edits: true,
   params: idParams,
-  body: z.strictObject({ ...typed, active: z.boolean().default(true) }).partial(),
+  body: z.strictObject({ ...typed, active: z.boolean() }).partial(),
   reply: supplier,
 });

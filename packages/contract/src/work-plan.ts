@@ -1,36 +1,36 @@
 import { z } from 'zod';
 import { line, minutes, percent, seconds } from './fields.ts';
+import { onceSound } from './once-sound.ts';
 
 /** What a step is counted per. */
 export const stepUnits = ['piece', 'strike', 'panel', 'strip', 'run'] as const;
 
-const rejectPercent = percent.refine((text) => Number(text) <= 99, 'Enter rejects from 0 to 99 %.');
+const rejectPercent = percent.refine((text) => Number(text) <= 99, onceSound('Enter rejects from 0 to 99 %.'));
 
 export const workStep = z.strictObject({
   name: line(60, 'Enter what is done, such as cut or set rivets.'),
-  per: z.enum(stepUnits, 'Choose what the step is counted per.'),
   setupMinutes: minutes,
   secondsPerUnit: seconds,
+  per: z.enum(stepUnits, 'Choose what the step is counted per.'),
   rejectPercent,
 });
-export type WorkStep = z.infer<typeof workStep>;
 
-/** How long the work takes: one figure to begin with, or step by step. */
+/** How long the work takes: one figure for 100 pieces to begin with, or step by step. The domain's WorkPlan. */
 export const workPlan = z.discriminatedUnion(
-  'by',
+  'kind',
   [
     z.strictObject({
-      by: z.literal('minutes per 100'),
-      minutesPer100: minutes.refine((text) => Number(text) > 0, 'Enter how many minutes 100 pieces take.'),
+      kind: z.literal('minutesPer100'),
+      minutes: minutes.refine(
+        (text) => Number(text) > 0,
+        onceSound('Enter how many minutes 100 pieces take.'),
+      ),
+      rejectPercent,
     }),
     z.strictObject({
-      by: z.literal('steps'),
-      steps: z
-        .array(workStep)
-        .min(1, 'Enter at least one step.')
-        .max(40, 'Keep it to 40 steps.'),
+      kind: z.literal('steps'),
+      steps: z.array(workStep).min(1, 'Enter at least one step.').max(40, 'Keep it to 40 steps.'),
     }),
   ],
   'Choose minutes per 100, or steps.',
 );
-export type TypedWorkPlan = z.infer<typeof workPlan>;

@@ -1,23 +1,48 @@
 export * from './errors/domain-error.ts';
-export * from './money/allocate.ts';
-export * from './money/amounts.ts';
-export * from './money/currencies.ts';
-export * from './money/invoice-totals.ts';
-export * from './money/round.ts';
-export * from './numbers/decimal-text.ts';
-export * from './outline/check-outline.ts';
-export * from './outline/describe-outline.ts';
-export * from './outline/measure.ts';
-export * from './outline/outline-path.ts';
-export * from './outline/outline.ts';
-export * from './outline/polygon.ts';
-export * from './rejects/allowance.ts';
-export * from './rejects/cut-count.ts';
+export { Exact, readDecimal, readWhole, toAtMost, toPlaces, toText } from './numbers/decimal-text.ts';
+export type { DecimalText, Limits } from './numbers/decimal-text.ts';
+
+export * from './units/measures.ts';
 export * from './units/convert.ts';
 export * from './units/footage.ts';
 export * from './units/length.ts';
-export * from './units/measures.ts';
-export * from './yield/hand-count.ts';
-export * from './yield/lay-out.ts';
-export * from './yield/layout-input-key.ts';
-export * from './yield/layout.ts';
+
+export * from './money/round.ts';
+export * from './money/allocate.ts';
+export * from './money/currencies.ts';
+export * from './money/amounts.ts';
+export * from './money/invoice-totals.ts';
+
+export * from './outline/outline.ts';
+export { checkOutline } from './outline/check-outline.ts';
+export { cuttingEdgeMm, outlineArea, outlineBounds } from './outline/measure.ts';
+export { outlinePolygon } from './outline/polygon.ts';
+export { outlinePath } from './outline/outline-path.ts';
+export { describeOutline } from './outline/describe-outline.ts';
+
+export type * from './yield/layout.ts';
+export { layOut } from './yield/lay-out.ts';
+export { handCount } from './yield/hand-count.ts';
+export { layoutInputKey } from './yield/layout-input-key.ts';
+
+export * from './rejects/cut-count.ts';
+export * from './rejects/allowance.ts';
+
+export * from './work/work-plan.ts';
+export * from './work/bench-minutes.ts';
+
+export type * from './costing/run-input.ts';
+export type { CostKind, CostLine, RunCost } from './costing/cost-run.ts';
+export type * from './pricing/run-numbers.ts';
+export { priceRun } from './pricing/price-run.ts';
+
+export * from './stock/check-run.ts';
+export { chooseLots } from './stock/choose-lots.ts';
+export type { FreeLot, LotTake } from './stock/choose-lots.ts';
+
+export * from './promise/day.ts';
+export * from './promise/workdays.ts';
+export * from './promise/book-hours.ts';
+
+export * from './compare/compare-run.ts';
+export { compute, computeNames } from './compute/compute.ts';

@@ -14,7 +14,13 @@ export function when<T extends string | number>(
 }
 
 /** All conditions as one WHERE clause, empty where there is none, with its values. */
-export function whereAll(conditions: readonly Condition[]): { where: string; values: (string | number | null)[] } {
+export function whereAll(conditions: readonly Condition[]): {
+  where: string;
+  values: (string | number | null)[];
+} {
   const sql = conditions.map((condition) => `(${condition.sql})`).join(' AND ');
-  return { where: sql === '' ? '' : `WHERE ${sql}`, values: conditions.flatMap((condition) => condition.values) };
+  return {
+    where: sql === '' ? '' : `WHERE ${sql}`,
+    values: conditions.flatMap((condition) => condition.values),
+  };
 }

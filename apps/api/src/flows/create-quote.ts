@@ -1,7 +1,10 @@
 import type { QuoteBody } from '@hidewright/contract';
-import type { Quote } from '../modules/quotes/quote.entity.ts';
+import { drawPaperNumber } from '../db/counters.ts';
+import { logDeed } from '../modules/activity/activity-log.ts';
+import { Quote } from '../modules/quotes/quote.entity.ts';
 import type { Work } from '../work.ts';
 import type { LaidPattern } from './lay-pattern.ts';
+import { keepRungs, workOutQuote } from './work-out-quote.ts';
 
 /**
  * Drafts a quote: draws its number, keeps the layout, takes the snapshot and prices it.
@@ -9,5 +12,15 @@ import type { LaidPattern } from './lay-pattern.ts';
  * @throws {Problem} 422 when the customer does not exist or the run cannot be priced
  */
 export async function createQuote(work: Work, asked: QuoteBody, laid: LaidPattern): Promise<Quote> {
-  throw new Error(`${work.today} ${asked.title} ${laid.patternId}`);
+  const workedOut = await workOutQuote(work, asked, laid);
+  const quote = work.em.create(Quote, {
+    ...workedOut,
+    number: await drawPaperNumber(work.em, 'Q'),
+    state: 'draft',
+    createdAt: work.now.toISOString(),
+  });
+  await work.em.flush();
+  await keepRungs(work, quote.id, workedOut);
+  await logDeed(work, { action: `drafted quote ${quote.number}`, subjectKind: 'quote', subjectId: quote.id });
+  return quote;
 }

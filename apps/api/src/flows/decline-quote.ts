@@ -1,12 +1,11 @@
 import { notFound } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
-import { revokeLinks } from '../modules/links/customer-links.ts';
 import { Quote } from '../modules/quotes/quote.entity.ts';
 import { requirePossible } from '../modules/quotes/quote-states.ts';
 import type { Work } from '../work.ts';
 
 /**
- * Notes that the customer declined; the link stops working.
+ * Notes that the customer declined: the link then says so.
  * @throws {Problem} 409 when the quote is neither a draft nor sent
  */
 export async function declineQuote(work: Work, asked: { quoteId: number; reason: string }): Promise<Quote> {
@@ -15,7 +14,6 @@ export async function declineQuote(work: Work, asked: { quoteId: number; reason:
   requirePossible(quote, 'decline');
   quote.state = 'declined';
   await work.em.flush();
-  await revokeLinks(work, quote.id);
   await logDeed(work, {
     action: `noted that quote ${quote.number} was declined`,
     subjectKind: 'quote',

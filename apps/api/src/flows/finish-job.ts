@@ -56,7 +56,9 @@ async function bringBack(work: Work, { id: jobId, number }: Job, { leatherLeft, 
     const quantity = scaled(new Decimal(areaMm2), 3);
     if (quantity > 0) await returnStock(work, { jobId, lotId, quantity, reason });
   }
-  for (const { hardwareId, quantity } of hardwareLeft) await returnStock(work, { jobId, hardwareId, quantity, reason });
+  for (const { hardwareId, quantity } of hardwareLeft) {
+    if (quantity > 0) await returnStock(work, { jobId, hardwareId, quantity, reason });
+  }
 }
 
 async function countStrikes(work: Work, job: Job, order: Order, uses: number): Promise<void> {

@@ -5,6 +5,7 @@ import { issueLink } from '../modules/links/customer-links.ts';
 import { enqueueMail } from '../modules/mail/outbox.ts';
 import { quoteLetter } from '../modules/quotes/quote-letter.ts';
 import type { Quote } from '../modules/quotes/quote.entity.ts';
+import { whyNoMail } from '../modules/quotes/why-no-mail.ts';
 import type { Work } from '../work.ts';
 import type { QuoteOnPaper } from './put-quote-on-paper.ts';
 
@@ -50,12 +51,6 @@ export async function handOverQuote(work: Work, quote: Quote, way: Way, drawn: Q
 }
 
 function requireMailable(customer: Customer, way: Way): void {
-  if (!way.mailAvailable) {
-    throw invalid([{ field: 'by', message: 'No mail server is set, so send it by hand: copy the link and the text.' }]);
-  }
-  if (customer.email === '') {
-    throw invalid([
-      { field: 'by', message: `${customer.name} has no e-mail address. Enter one with the customer, or send it by hand.` },
-    ]);
-  }
+  const message = whyNoMail(customer, way.mailAvailable);
+  if (message !== null) throw invalid([{ field: 'by', message }]);
 }

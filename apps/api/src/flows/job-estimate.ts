@@ -1,4 +1,4 @@
-import type { RunInput } from '@hidewright/domain';
+import { priceRun, type BreakNumbers, type RunInput } from '@hidewright/domain';
 import type { Job } from '../modules/jobs/job.entity.ts';
 
 /** What the quote said of the run, kept with its job so that fact can stand beside it. */
@@ -11,3 +11,10 @@ export interface JobEstimate {
 }
 
 export const estimateOf = (job: Job): JobEstimate => job.estimate as JobEstimate;
+
+/** The numbers of the run as they were said. */
+export function numbersOf({ input }: JobEstimate): BreakNumbers {
+  const [numbers] = priceRun(input).breaks;
+  if (numbers === undefined) throw new TypeError('A job is of one quantity');
+  return numbers;
+}

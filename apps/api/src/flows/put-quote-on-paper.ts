@@ -18,7 +18,7 @@ export interface QuoteOnPaper {
  * @throws {Problem} 404
  */
 export async function putQuoteOnPaper(
-  context: Pick<Context, 'orm' | 'clock' | 'papers' | 'files'>,
+  context: Context,
   actor: Actor,
   quoteId: number,
 ): Promise<QuoteOnPaper> {

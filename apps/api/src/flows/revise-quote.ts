@@ -25,6 +25,7 @@ export async function reviseQuote(work: Work, quoteId: number): Promise<Quote> {
     state: 'draft',
     input: quote.input,
     numbers: quote.numbers,
+    overrides: quote.overrides,
     message: quote.message,
     createdAt: work.now.toISOString(),
   });

@@ -1,5 +1,6 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import { requireVersion } from '../http/conditions.ts';
+import { requireFreeName } from '../http/free-name.ts';
 import { invalid, type FieldFault } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { Hardware } from '../modules/hardware/hardware.entity.ts';
@@ -20,7 +21,8 @@ export async function addPattern(
   asked: { name: string; definition: PatternDefinition },
   worked: WorkedLayout,
 ): Promise<Pattern> {
-  await requireSound(work, asked);
+  await requireFreeName(work.em, Pattern, asked.name);
+  await requireParts(work, asked.definition);
   const pattern = work.em.create(Pattern, { name: asked.name, latestVersion: 1 });
   await work.em.flush();
   await addVersion(work, pattern, asked.definition);
@@ -48,7 +50,8 @@ export async function changePattern(
 ): Promise<Pattern> {
   const pattern = await findPattern(work, asked.id);
   await requireVersion(work.em, { kind: 'pattern', id: pattern.id, version: pattern.version }, asked.ifMatch);
-  await requireSound(work, asked.change, pattern.id);
+  if (asked.change.name !== undefined) await requireFreeName(work.em, Pattern, asked.change.name, pattern.id);
+  if (asked.change.definition !== undefined) await requireParts(work, asked.change.definition);
   const { name = pattern.name, active = pattern.active, definition } = asked.change;
   const redesigned = definition !== undefined && (await isNew(work, pattern, definition));
   if (!redesigned && name === pattern.name && active === pattern.active) return pattern;
@@ -80,21 +83,7 @@ async function addVersion(work: Work, pattern: Pattern, definition: PatternDefin
   await work.em.flush();
 }
 
-async function requireSound(work: Work, asked: PatternChange, ownId?: number): Promise<void> {
-  const faults = [
-    ...(asked.name === undefined ? [] : await nameFaults(work, asked.name, ownId)),
-    ...(asked.definition === undefined ? [] : await partFaults(work, asked.definition)),
-  ];
-  if (faults.length > 0) throw invalid(faults);
-}
-
-async function nameFaults(work: Work, name: string, ownId: number | undefined): Promise<FieldFault[]> {
-  const other = await work.em.findOne(Pattern, { name });
-  if (other === null || other.id === ownId) return [];
-  return [{ field: 'name', message: 'Another pattern has this name. Choose another one.' }];
-}
-
-async function partFaults({ em }: Work, { leatherId, hardware }: PatternDefinition): Promise<FieldFault[]> {
+async function requireParts({ em }: Work, { leatherId, hardware }: PatternDefinition): Promise<void> {
   const faults: FieldFault[] = [];
   if ((await em.count(Leather, { id: leatherId })) === 0) {
     faults.push({ field: 'definition.leatherId', message: 'This leather is not there. Choose one from the list.' });
@@ -105,5 +94,5 @@ async function partFaults({ em }: Work, { leatherId, hardware }: PatternDefiniti
     const field = `definition.hardware.${at}.hardwareId`;
     faults.push({ field, message: 'This hardware is not there. Choose one from the list.' });
   });
-  return faults;
+  if (faults.length > 0) throw invalid(faults);
 }

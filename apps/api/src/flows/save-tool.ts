@@ -36,9 +36,9 @@ export async function changeTool(
   await requireVersion(work.em, { kind: 'tool', id: tool.id, version: tool.version }, asked.ifMatch);
   const { cost, ...plain } = asked.change;
   if (plain.state !== undefined) requireNextState(tool, plain.state);
+  await requireSound(work, afterChange(tool, plain));
   assignDefined(tool, plain);
   if (cost !== undefined) tool.cost = new Decimal(cost);
-  await requireSound(work, tool);
   await work.em.flush();
   const detail = { changed: Object.keys(asked.change), state: tool.state };
   await logDeed(work, { action: `changed ${nameOf(tool)}`, subjectKind: 'tool', subjectId: tool.id, detail });
@@ -52,6 +52,13 @@ async function nextNumber({ em }: Work, kind: Tool['kind']): Promise<string> {
   const tools = await em.find(Tool, { kind }, { fields: ['number'] });
   const numbers = tools.map(({ number }) => (/^\d+$/.test(number) ? Number(number) : 0));
   return String(Math.max(0, ...numbers) + 1);
+}
+
+function afterChange(tool: Tool, change: { [K in keyof Checked]?: Checked[K] | undefined }): Checked {
+  const { id, kind, number, metal, patternId, customerId } = tool;
+  const checked = { id, kind, number, metal, patternId, customerId };
+  assignDefined<Checked>(checked, change);
+  return checked;
 }
 
 type Checked = Pick<Tool, 'kind' | 'number' | 'metal' | 'patternId' | 'customerId'> & { id?: number };
@@ -72,19 +79,17 @@ function metalFaults({ kind, metal }: Checked): FieldFault[] {
 }
 
 async function numberFaults({ em }: Work, { id, kind, number }: Checked): Promise<FieldFault[]> {
-  // The tool being changed is left out by its id, since asking would first write its change.
-  const others = await em.find(Tool, { kind, number }, { flushMode: 'commit', disableIdentityMap: true });
-  if (others.every((other) => other.id === id)) return [];
+  const other = await em.findOne(Tool, { kind, number });
+  if (other === null || other.id === id) return [];
   return [{ field: 'number', message: `There is a ${kind} ${number} already. Choose another number.` }];
 }
 
 async function ownerFaults({ em }: Work, { patternId, customerId }: Checked): Promise<FieldFault[]> {
   const faults: FieldFault[] = [];
-  const options = { flushMode: 'commit' } as const;
-  if (patternId !== null && (await em.findOne(Pattern, patternId, options)) === null) {
+  if (patternId !== null && (await em.findOne(Pattern, patternId)) === null) {
     faults.push({ field: 'patternId', message: 'This pattern is not there. Choose one from the list.' });
   }
-  if (customerId !== null && (await em.findOne(Customer, customerId, options)) === null) {
+  if (customerId !== null && (await em.findOne(Customer, customerId)) === null) {
     faults.push({ field: 'customerId', message: 'This customer is not there. Choose one from the list.' });
   }
   return faults;

@@ -1,12 +1,13 @@
+import { addDays } from '@hidewright/domain';
 import { invalid, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { enqueueMail } from '../modules/mail/outbox.ts';
 import { findPurchaseOrder } from '../modules/purchase-orders/draft-purchase-order.ts';
+import { purchaseOrderLetter } from '../modules/purchase-orders/purchase-order-letter.ts';
 import type { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
 import { readOnePurchaseOrder } from '../modules/purchase-orders/read-purchase-orders.ts';
 import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
-import { purchaseOrderLetter } from '../papers/purchase-order-letter.ts';
 import type { Work } from '../work.ts';
 
 /**
@@ -23,7 +24,7 @@ export async function sendPurchaseOrder(
   if (asked.by === 'mail') requireMail(supplier, asked.mailIsSet);
   order.state = 'sent';
   order.sentAt = work.now.toISOString();
-  order.expectedOn ??= daysAfter(work.today, supplier.leadDays);
+  order.expectedOn ??= addDays(work.today, supplier.leadDays);
   await work.em.flush();
   if (asked.by === 'mail') await mail(work, order, supplier);
   await logDeed(work, {
@@ -36,12 +37,17 @@ export async function sendPurchaseOrder(
 
 function notADraft(order: PurchaseOrder) {
   const open = order.state === 'sent' || order.state === 'part received';
-  return wrongState(`${order.number} is ${order.state} already; only a draft can be sent.`, open ? ['receive'] : []);
+  return wrongState(
+    `${order.number} is ${order.state} already; only a draft can be sent.`,
+    open ? ['receive'] : [],
+  );
 }
 
 function requireMail(supplier: Supplier, mailIsSet: boolean): void {
   if (!mailIsSet) {
-    throw invalid([{ field: 'by', message: 'Mail is not set up in this shop. Hand the order over yourself.' }]);
+    throw invalid([
+      { field: 'by', message: 'Mail is not set up in this shop. Hand the order over yourself.' },
+    ]);
   }
   if (supplier.email !== '') return;
   const message = `${supplier.name} has no e-mail address. Add one to the supplier, or hand the order over yourself.`;
@@ -57,10 +63,4 @@ async function mail(work: Work, order: PurchaseOrder, supplier: Supplier): Promi
     subjectKind: 'purchase order',
     subjectId: order.id,
   });
-}
-
-function daysAfter(day: string, days: number): string {
-  const date = new Date(`${day}T00:00:00Z`);
-  date.setUTCDate(date.getUTCDate() + days);
-  return date.toISOString().slice(0, 10);
 }

@@ -4,6 +4,7 @@ import { findOrder } from '../modules/orders/find-order.ts';
 import type { Order } from '../modules/orders/order.entity.ts';
 import { allowedFor } from '../modules/orders/order-states.ts';
 import type { Work } from '../work.ts';
+import { closeIfSettled } from './close-order.ts';
 
 /**
  * The packed order has left the shop.
@@ -24,5 +25,6 @@ export async function shipOrder(work: Work, orderId: number, shippedOn: string):
   order.shippedOn = shippedOn;
   await work.em.flush();
   await logDeed(work, { action: `shipped ${order.number}`, subjectKind: 'order', subjectId: order.id, detail: { shippedOn } });
+  await closeIfSettled(work, order.id);
   return order;
 }

@@ -15,5 +15,7 @@ export async function requireFreeName<T extends { id: number; name: string }>(
 ): Promise<void> {
   const named = (await em.find<{ id: number; name: string }>(entity, { name }))[0];
   if (named === undefined || named.id === id) return;
-  throw invalid([{ field: 'name', message: `There is one named ${name} already. Choose another name.` }]);
+  throw invalid([
+    { field: 'name', message: `There is one named ${name} already. Choose another name.` },
+  ]);
 }

@@ -226,6 +226,7 @@ const counterRoom = [
     state TEXT NOT NULL CHECK (state IN (${states('draft', 'sent', 'agreed', 'declined', 'superseded', 'lapsed')})),
     input TEXT NOT NULL CHECK (json_valid(input)),
     numbers TEXT NOT NULL CHECK (json_valid(numbers)),
+    overrides TEXT NOT NULL CHECK (json_valid(overrides)),
     message TEXT NOT NULL,
     created_at TEXT NOT NULL,
     sent_at TEXT,

@@ -131,23 +131,22 @@ function writePayments(book: Book, { payments }: SalesSheet): void {
   write(book, 'Payments', columns, rows);
 }
 
-function writeTotals(book: Book, sheet: SalesSheet): void {
-  const { totals } = sheet;
+function writeTotals(book: Book, { totals, fromDay, toDay, currency }: SalesSheet): void {
   const columns = [
-    column('Total', 'text', 20),
-    column('Value', 'money', 16),
-    column('Unit', 'text', 32),
+    column('From', 'day'),
+    column('To', 'day'),
+    column('Currency', 'text', 10),
+    column('Invoices', 'count', 10),
+    column('Net', 'money'),
+    column('Tax', 'money'),
+    column('Total', 'money'),
+    column('Payments', 'count', 10),
+    column('Received', 'money'),
   ];
-  const period = `${sheet.currency}, ${sheet.fromDay} to ${sheet.toDay}`;
-  const rows: Cell[][] = [
-    ['Invoices', totals.invoices, 'count'],
-    ['Net', totals.net, period],
-    ['Tax', totals.tax, period],
-    ['Total', totals.total, period],
-    ['Payments', totals.payments, 'count'],
-    ['Received', totals.received, period],
-  ];
-  write(book, 'Totals', columns, rows);
+  const { invoices, net, tax, total, payments, received } = totals;
+  write(book, 'Totals', columns, [
+    [fromDay, toDay, currency, invoices, net, tax, total, payments, received],
+  ]);
 }
 
 function write(book: Book, name: string, columns: Column[], rows: Cell[][]): void {

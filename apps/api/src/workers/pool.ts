@@ -17,6 +17,8 @@ export interface Workers {
 export function startWorkers(config: Config): Workers {
   const pool = new Piscina({
     filename: new URL('./entry.mjs', import.meta.url).href,
+    // The worker brings its own loader; the parent's would load it a second time.
+    execArgv: [],
     minThreads: 0,
     maxThreads: Math.max(1, Math.min(2, os.availableParallelism())),
     idleTimeout: 60_000,

@@ -1,6 +1,6 @@
 import { pathToFileURL } from 'node:url';
-import { knex } from '@mikro-orm/sqlite';
-import { readSalesSheet } from '../modules/periods/sales-sheet.ts';
+import { knex, type Knex } from '@mikro-orm/sqlite';
+import { readSalesSheet, type ReadRows } from '../modules/periods/sales-sheet.ts';
 import { drawSalesSheet } from '../papers/sales-sheet.ts';
 
 export interface SheetRequest {
@@ -21,11 +21,14 @@ export async function salesSheet({ database, ...head }: SheetRequest): Promise<U
     useNullAsDefault: true,
   });
   try {
-    const sheet = await connection.transaction((moment) =>
-      readSalesSheet(async (sql, params) => moment.raw(sql, params as string[]), head),
-    );
+    const sheet = await connection.transaction((moment) => readSalesSheet(readerOn(moment), head));
     return await drawSalesSheet(sheet);
   } finally {
     await connection.destroy();
   }
 }
+
+const readerOn =
+  (moment: Knex.Transaction): ReadRows =>
+  async <Row>(sql: string, params: unknown[]) =>
+    (await moment.raw(sql, params as string[])) as unknown as Row[];

@@ -9,7 +9,7 @@ const special: Record<string, string> = {
   "'": '&#39;',
 };
 
-export function escaped(text: string): string {
+function escaped(text: string): string {
   return text.replace(/[&<>"']/g, (character) => special[character] ?? '');
 }
 

@@ -1,12 +1,13 @@
 import { Menu } from '@base-ui/react/menu';
 import type { Role } from '@hidewright/contract';
+import { useState } from 'react';
 import { NavLink, useNavigate } from 'react-router-dom';
 import { menuLook } from './menu-look.ts';
 import { RoomIcon } from './room-icon.tsx';
 import { roomsFor } from './rooms.ts';
 
 const itemLook =
-  'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 rounded px-1 text-sm outline-offset-0!';
+  'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 rounded px-1 text-center text-sm leading-tight outline-offset-0!';
 
 /** On a phone: the rooms that the role uses most, the others behind More. */
 export function BottomBar({ role }: { role: Role }) {
@@ -14,7 +15,10 @@ export function BottomBar({ role }: { role: Role }) {
   const shown = all.filter((room) => room.bar.includes(role));
   const others = all.filter((room) => !room.bar.includes(role));
   return (
-    <nav aria-label="Rooms" className="no-print fixed inset-x-0 bottom-0 z-30 bg-card pb-[env(safe-area-inset-bottom)] md:hidden">
+    <nav
+      aria-label="Rooms"
+      className="no-print fixed inset-x-0 bottom-0 z-30 bg-card pb-[env(safe-area-inset-bottom)] md:hidden"
+    >
       <div aria-hidden="true" className="stitched h-0.5" />
       <ul className="flex px-1 py-1">
         {shown.map((room) => (
@@ -42,17 +46,29 @@ export function BottomBar({ role }: { role: Role }) {
 
 function MoreRooms({ others }: { others: ReturnType<typeof roomsFor> }) {
   const navigate = useNavigate();
+  // Within the bar, so that the open menu belongs to a landmark.
+  const [home, setHome] = useState<HTMLElement | null>(null);
   return (
     <Menu.Root>
+      <div ref={setHome} />
       <Menu.Trigger className={`${itemLook} text-ink-soft`}>
         <RoomIcon name="more" size={22} />
         More
       </Menu.Trigger>
-      <Menu.Portal>
-        <Menu.Positioner sideOffset={10} align="end" collisionPadding={8} className="z-40 outline-none">
+      <Menu.Portal container={home}>
+        <Menu.Positioner
+          sideOffset={10}
+          align="end"
+          collisionPadding={8}
+          className="z-40 outline-none"
+        >
           <Menu.Popup className={menuLook.popup}>
             {others.map((room) => (
-              <Menu.Item key={room.path} className={menuLook.item} onClick={() => void navigate(room.path)}>
+              <Menu.Item
+                key={room.path}
+                className={menuLook.item}
+                onClick={() => void navigate(room.path)}
+              >
                 <RoomIcon name={room.icon} size={22} />
                 {room.word}
               </Menu.Item>

@@ -4,19 +4,22 @@ import { sessionQuery } from '../features/session/session.queries.ts';
 import { queryClient } from '../lib/query-client.ts';
 import { roomAt } from './rooms.ts';
 
-/** Before anything of a room is read: is somebody signed in, and does this room open for them? */
-export const guardRooms: MiddlewareFunction = async ({ request }) => {
+/** Before anything is read: is somebody signed in? */
+export const guardSession: MiddlewareFunction = async ({ request }) => {
   const session = await queryClient.ensureQueryData(sessionQuery());
   if (session.firstRun) throw redirect('/open-shop');
+  if (session.person) return;
   const { pathname, search } = new URL(request.url);
-  if (!session.person) {
-    const wanted = pathname === '/' ? '' : `?to=${encodeURIComponent(pathname + search)}`;
-    throw redirect(`/sign-in${wanted}`);
-  }
-  const room = roomAt(pathname);
-  if (room && !room.roles.includes(session.person.role)) {
-    throw new Response(`${room.word} is not open to the ${session.person.role}.`, { status: 403 });
-  }
+  const wanted = pathname === '/' ? '' : `?to=${encodeURIComponent(pathname + search)}`;
+  throw redirect(`/sign-in${wanted}`);
+};
+
+/** Does this room open for them? The API asks the same again. */
+export const guardRoom: MiddlewareFunction = async ({ request }) => {
+  const { person } = await queryClient.ensureQueryData(sessionQuery());
+  const room = roomAt(new URL(request.url).pathname);
+  if (!person || !room || room.roles.includes(person.role)) return;
+  throw redirect(`/closed${room.path}`);
 };
 
 /** Where to go after signing in: only ever a place within this program. */

@@ -1,6 +1,7 @@
 import { Menu } from '@base-ui/react/menu';
 import type { SignedIn } from '@hidewright/contract';
 import { ChevronDown, LogOut } from 'lucide-react';
+import { useState } from 'react';
 import { say } from '../components/toast.ts';
 import { useSignOut } from '../features/session/session.mutations.ts';
 import { menuLook } from './menu-look.ts';
@@ -8,24 +9,33 @@ import { menuLook } from './menu-look.ts';
 /** Who is signed in, and the way out. */
 export function PersonMenu({ person }: { person: SignedIn }) {
   const signOut = useSignOut();
+  // Within the header, so that the open menu belongs to a landmark.
+  const [home, setHome] = useState<HTMLElement | null>(null);
   const leave = () =>
-    signOut.mutate({}, { onError: () => say('You are still signed in: the workshop’s computer cannot be reached.') });
+    signOut.mutate(
+      {},
+      { onError: () => say('You are still signed in: the workshop’s computer cannot be reached.') },
+    );
   return (
     <Menu.Root>
+      <div ref={setHome} />
       <Menu.Trigger
         aria-label={`${person.name}, ${person.role}`}
         className="flex min-h-10 shrink-0 items-center gap-2 rounded px-2 hover:bg-stitch/20 data-popup-open:bg-stitch/20"
       >
-        <span aria-hidden="true" className="grid size-8 place-items-center rounded-full border-2 border-brass bg-manila text-sm font-bold">
+        <span
+          aria-hidden="true"
+          className="grid size-8 place-items-center rounded-full border-2 border-brass bg-manila text-sm font-bold"
+        >
           {initials(person.name)}
         </span>
-        <span className="hidden leading-tight lg:block">
+        <span className="hidden text-left leading-tight lg:block">
           {person.name.split(' ')[0]}
           <span className="block text-sm text-ink-soft">{person.role}</span>
         </span>
         <ChevronDown size={16} aria-hidden="true" className="hidden text-ink-soft lg:block" />
       </Menu.Trigger>
-      <Menu.Portal>
+      <Menu.Portal container={home}>
         <Menu.Positioner sideOffset={6} align="end" className="z-40 outline-none">
           <Menu.Popup className={menuLook.popup}>
             <Menu.Group>

@@ -33,7 +33,13 @@ export const rooms: readonly Room[] = [
     roles: ['owner', 'maker'],
     bar: ['maker'],
   },
-  { path: '/bench', word: 'Bench', icon: 'bench', roles: ['owner', 'maker'], bar: ['owner', 'maker'] },
+  {
+    path: '/bench',
+    word: 'Bench',
+    icon: 'bench',
+    roles: ['owner', 'maker'],
+    bar: ['owner', 'maker'],
+  },
   {
     path: '/stockroom',
     word: 'Stockroom',

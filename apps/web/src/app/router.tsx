@@ -1,7 +1,8 @@
 import { createBrowserRouter, redirect } from 'react-router-dom';
 import { PageLoading } from '../components/loading.tsx';
 import { RouteError } from '../components/route-error.tsx';
-import { guardRooms } from './guard.ts';
+import { guardRoom, guardSession } from './guard.ts';
+import { OutsideError } from './outside-error.tsx';
 import { benchRoutes } from './routes/bench.routes.ts';
 import { booksRoutes } from './routes/books.routes.ts';
 import { counterRoutes } from './routes/counter.routes.ts';
@@ -14,22 +15,24 @@ import { Shell } from './shell.tsx';
 
 export const router: ReturnType<typeof createBrowserRouter> = createBrowserRouter([
   {
-    ErrorBoundary: RouteError,
+    ErrorBoundary: OutsideError,
     HydrateFallback: PageLoading,
     children: [
       { path: '/sign-in', lazy: () => import('./routes/sign-in.tsx') },
       { path: '/open-shop', lazy: () => import('./routes/open-shop.tsx') },
       ...linkRoutes,
       {
-        middleware: [guardRooms],
+        middleware: [guardSession],
         Component: Shell,
-        // Middleware runs only where something is loaded.
-        loader: () => null,
         children: [
           {
+            middleware: [guardRoom],
             ErrorBoundary: RouteError,
+            // Middleware runs only where something is loaded.
+            loader: () => null,
+            shouldRevalidate: () => true,
             children: [
-              { path: '/', loader: () => redirect('/today') },
+              { path: '/', loader: () => redirect('/today'), Component: PageLoading },
               ...todayRoutes,
               ...counterRoutes,
               ...patternRoomRoutes,
@@ -37,6 +40,7 @@ export const router: ReturnType<typeof createBrowserRouter> = createBrowserRoute
               ...stockroomRoutes,
               ...booksRoutes,
               ...officeRoutes,
+              { path: '/closed/:room', lazy: () => import('./routes/closed-room.tsx') },
               { path: '*', lazy: () => import('./routes/not-found.tsx') },
             ],
           },

@@ -64,7 +64,12 @@ export function SearchBox({ onDone }: { onDone: () => void }) {
         />
       </div>
       <div aria-hidden="true" className="stitched h-0.5" />
-      <ul id={`${id}-list`} role="listbox" aria-label="Found" className="max-h-[60dvh] overflow-y-auto p-1.5 empty:hidden">
+      <ul
+        id={`${id}-list`}
+        role="listbox"
+        aria-label="Found"
+        className="max-h-[60dvh] overflow-y-auto p-1.5 empty:hidden"
+      >
         {items.map((item, index) => (
           <SearchResult
             key={item.to}
@@ -87,5 +92,7 @@ function sentenceFor(wanted: string, found: number, failed: boolean): string {
   if (failed) return 'The search did not answer. Try again in a moment.';
   if (wanted === '') return 'Type part of a number or a name.';
   if (found === 0) return `Nothing found for “${wanted}”.`;
-  return found === 1 ? 'One found. Enter goes there.' : `${found} found. Arrows move, Enter goes there.`;
+  return found === 1
+    ? 'One found. Enter goes there.'
+    : `${found} found. Arrows move, Enter goes there.`;
 }

@@ -9,7 +9,8 @@ export function SearchEverywhere() {
 
   useEffect(() => {
     function onKey(event: KeyboardEvent) {
-      if (event.key.toLowerCase() !== 'k' || !(event.ctrlKey || event.metaKey) || event.altKey) return;
+      if (event.key.toLowerCase() !== 'k' || !(event.ctrlKey || event.metaKey) || event.altKey)
+        return;
       event.preventDefault();
       setOpen(true);
     }
@@ -27,7 +28,10 @@ export function SearchEverywhere() {
         <span className="sr-only grow truncate text-left text-sm md:not-sr-only">
           Find a number, customer, pattern, tag…
         </span>
-        <kbd aria-hidden="true" className="hidden rounded border border-stitch px-1.5 font-sans text-sm whitespace-nowrap lg:block">
+        <kbd
+          aria-hidden="true"
+          className="hidden rounded border border-stitch px-1.5 font-sans text-sm whitespace-nowrap lg:block"
+        >
           Ctrl K
         </kbd>
       </Dialog.Trigger>

@@ -6,7 +6,7 @@ import type { WhenEmpty } from './use-field.ts';
 
 interface AreaFieldProps extends FieldLabels {
   name: string;
-  whenEmpty?: WhenEmpty;
+  whenEmpty?: WhenEmpty | undefined;
 }
 
 /** An area in the shop's unit: 24.75, 24¾ and 24³ are the same. Its value is mm². */

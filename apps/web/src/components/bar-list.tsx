@@ -7,10 +7,15 @@ export interface Bar {
   value: number;
   /** What is said at the right. */
   shown: ReactNode;
-  tone?: 'info' | 'attention' | 'danger' | 'act';
+  tone?: 'info' | 'attention' | 'danger' | 'act' | undefined;
 }
 
-const tones = { info: 'bg-slate', attention: 'bg-brass', danger: 'bg-oxblood', act: 'bg-verdigris' };
+const tones = {
+  info: 'bg-slate',
+  attention: 'bg-brass',
+  danger: 'bg-oxblood',
+  act: 'bg-verdigris',
+};
 
 /** A few values beside each other, as bars with their figures. */
 export function BarList({ label, bars }: { label: string; bars: readonly Bar[] }) {

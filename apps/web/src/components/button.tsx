@@ -4,7 +4,7 @@ import { buttonLook, type ButtonLook } from './button-look.ts';
 
 export interface ButtonProps extends ButtonHTMLAttributes<HTMLButtonElement>, ButtonLook {
   /** While it sends: it keeps the focus, says so, and cannot be pressed again. */
-  busy?: boolean;
+  busy?: boolean | undefined;
 }
 
 export function Button(props: ButtonProps) {
@@ -15,7 +15,11 @@ export function Button(props: ButtonProps) {
       type={type}
       aria-disabled={busy || undefined}
       onClick={busy ? (event) => event.preventDefault() : onClick}
-      className={classNames(buttonLook({ tone, size }), busy && 'cursor-progress opacity-70', className)}
+      className={classNames(
+        buttonLook({ tone, size }),
+        busy && 'cursor-progress opacity-70',
+        className,
+      )}
     >
       {children}
       {busy && <span className="sr-only">, sending</span>}

@@ -2,12 +2,12 @@ import { useId, type ReactNode } from 'react';
 import { classNames } from '../lib/class-names.ts';
 
 interface CardProps {
-  title?: ReactNode;
-  subtitle?: ReactNode;
+  title?: ReactNode | undefined;
+  subtitle?: ReactNode | undefined;
   /** Beside the title: a link or a quiet button. */
-  aside?: ReactNode;
-  className?: string;
-  children?: ReactNode;
+  aside?: ReactNode | undefined;
+  className?: string | undefined;
+  children?: ReactNode | undefined;
 }
 
 /** A sheet of paper on the bench, with a title of its own. */

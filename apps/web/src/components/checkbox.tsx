@@ -5,7 +5,7 @@ import { useField } from './use-field.ts';
 interface CheckboxProps {
   name: string;
   label: ReactNode;
-  help?: ReactNode;
+  help?: ReactNode | undefined;
 }
 
 /** Yes or no. */

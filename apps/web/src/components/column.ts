@@ -7,12 +7,12 @@ export interface Column<Row> {
   /** What it is sorted and filtered by; decimal texts sort as numbers. */
   value: (row: Row) => string | number | null | undefined;
   /** How it is shown; its value, if not said. */
-  cell?: (row: Row) => ReactNode;
+  cell?: ((row: Row) => ReactNode) | undefined;
   /** Figures stand at the right. */
-  align?: 'left' | 'right';
+  align?: 'left' | 'right' | undefined;
   /** In the totals row, over the rows that the filter leaves. */
-  total?: (rows: readonly Row[]) => ReactNode;
-  sortable?: boolean;
+  total?: ((rows: readonly Row[]) => ReactNode) | undefined;
+  sortable?: boolean | undefined;
   /** On a phone a row is a card: this column is its title, or is left out. */
-  onPhone?: 'title' | 'line' | 'hidden';
+  onPhone?: 'title' | 'line' | 'hidden' | undefined;
 }

@@ -14,8 +14,8 @@ interface ConfirmDialogProps {
   children: ReactNode;
   /** The act itself, as a verb: "Issue the invoice". */
   confirmWord: string;
-  cancelWord?: string;
-  tone?: 'primary' | 'danger';
+  cancelWord?: string | undefined;
+  tone?: 'primary' | 'danger' | undefined;
   /** It stays open until this is done; what it throws is shown. */
   onConfirm: () => Promise<unknown>;
 }

@@ -1,5 +1,6 @@
 import { ArrowDown, ArrowUp, ChevronsUpDown } from 'lucide-react';
 import { classNames } from '../lib/class-names.ts';
+import { tableRoles } from './table-roles.ts';
 import type { Column } from './column.ts';
 
 export interface TableSorting {
@@ -16,12 +17,15 @@ interface DataTableHeadProps<Row> {
 /** The headers, each a button that sorts; they stay in sight. */
 export function DataTableHead<Row>({ columns, sorting, onSort }: DataTableHeadProps<Row>) {
   return (
-    <thead role="rowgroup" className="sticky top-0 z-10 hidden bg-card shadow-[0_1px_0_var(--color-edge)] md:table-header-group">
-      <tr role="row">
+    <thead
+      {...tableRoles.group}
+      className="sticky top-0 z-10 hidden bg-card shadow-[0_1px_0_var(--color-edge)] md:table-header-group"
+    >
+      <tr {...tableRoles.row}>
         {columns.map((column) => (
           <th
             key={column.id}
-            role="columnheader"
+            {...tableRoles.header}
             scope="col"
             aria-sort={sortWord(column, sorting)}
             className={classNames(

@@ -1,6 +1,7 @@
 import { useTable, type ColumnDef, type RowData } from '@tanstack/react-table';
 import { useMemo, type ReactNode } from 'react';
 import { classNames } from '../lib/class-names.ts';
+import { tableRoles } from './table-roles.ts';
 import type { Column } from './column.ts';
 import { DataTableHead } from './data-table-head.tsx';
 import { DataTableRow } from './data-table-row.tsx';
@@ -17,13 +18,13 @@ interface DataTableProps<Row extends RowData> {
   /** Shown instead of the table while there are no rows at all: an EmptyState that says what to do first. */
   empty: ReactNode;
   /** "Filter lots"; without one there is no filter field. */
-  filterLabel?: string;
+  filterLabel?: string | undefined;
   /** The column and direction to begin with. */
-  sortedBy?: { id: string; desc?: boolean };
+  sortedBy?: { id: string; desc?: boolean | undefined } | undefined;
   /** Where the list can be had as a spreadsheet. */
-  sheetAddress?: string;
+  sheetAddress?: string | undefined;
   /** Under the last row, such as a button for more. */
-  after?: ReactNode;
+  after?: ReactNode | undefined;
 }
 
 /** A real table: sorted by its headers, filtered, added up; on a phone each row is a card. */
@@ -59,15 +60,19 @@ export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
         onSort={(id, desc) => table.setSorting([{ id, desc }])}
         sheetAddress={sheetAddress}
       />
-      <table role="table" aria-label={label} className="block w-full md:table">
-        <DataTableHead columns={columns} sorting={sorting} onSort={(id, desc) => table.setSorting([{ id, desc }])} />
-        <tbody role="rowgroup" className="block space-y-2 md:table-row-group">
+      <table {...tableRoles.table} aria-label={label} className="block w-full md:table">
+        <DataTableHead
+          columns={columns}
+          sorting={sorting}
+          onSort={(id, desc) => table.setSorting([{ id, desc }])}
+        />
+        <tbody {...tableRoles.group} className="block space-y-2 md:table-row-group">
           {shown.map((row) => (
             <DataTableRow key={row.id} columns={columns} row={row.original} />
           ))}
         </tbody>
         {hasTotals && (
-          <tfoot role="rowgroup" className="mt-2 block md:table-footer-group">
+          <tfoot {...tableRoles.group} className="mt-2 block md:table-footer-group">
             <TotalsRow columns={columns} rows={shown.map((row) => row.original)} />
           </tfoot>
         )}
@@ -90,17 +95,23 @@ function definitionOf<Row extends RowData>(column: Column<Row>): ColumnDef<Featu
   };
 }
 
-function TotalsRow<Row>({ columns, rows }: { columns: readonly Column<Row>[]; rows: readonly Row[] }) {
+function TotalsRow<Row>({
+  columns,
+  rows,
+}: {
+  columns: readonly Column<Row>[];
+  rows: readonly Row[];
+}) {
   const first = columns.findIndex((column) => column.total);
   return (
     <tr
-      role="row"
+      {...tableRoles.row}
       className="block border-t-2 border-edge px-3 py-2 font-bold md:table-row md:px-0"
     >
       {columns.map((column, index) => (
         <td
           key={column.id}
-          role="cell"
+          {...tableRoles.cell}
           className={classNames(
             'md:table-cell md:px-3 md:py-2',
             column.align === 'right' && 'md:text-right',

@@ -4,9 +4,9 @@ import { emptied, useField, type WhenEmpty } from './use-field.ts';
 
 interface DayFieldProps extends FieldLabels {
   name: string;
-  min?: string;
-  max?: string;
-  whenEmpty?: WhenEmpty;
+  min?: string | undefined;
+  max?: string | undefined;
+  whenEmpty?: WhenEmpty | undefined;
 }
 
 /** A calendar day, typed or picked with the device's own calendar. */
@@ -16,7 +16,9 @@ export function DayField({ name, min, max, whenEmpty = 'absent', ...labels }: Da
     <Field id={id} error={error} {...labels}>
       <InputFrame id={id} short invalid={error !== undefined}>
         <input
-          {...register(name, { setValueAs: (value: unknown) => (value === '' ? emptied(whenEmpty) : value) })}
+          {...register(name, {
+            setValueAs: (value: unknown) => (value === '' ? emptied(whenEmpty) : value),
+          })}
           id={id}
           type="date"
           min={min}

@@ -7,7 +7,7 @@ interface DialogProps {
   open: boolean;
   onOpenChange: (open: boolean) => void;
   title: ReactNode;
-  description?: ReactNode;
+  description?: ReactNode | undefined;
   children: ReactNode;
 }
 
@@ -28,7 +28,9 @@ export function Dialog({ open, onOpenChange, title, description, children }: Dia
             </Primitive.Close>
           </div>
           {description && (
-            <Primitive.Description className="mb-4 text-ink-soft">{description}</Primitive.Description>
+            <Primitive.Description className="mb-4 text-ink-soft">
+              {description}
+            </Primitive.Description>
           )}
           {children}
         </Primitive.Popup>

@@ -3,8 +3,8 @@ import type { ReactNode } from 'react';
 interface EmptyStateProps {
   title: string;
   /** What to do first, in a sentence. */
-  children?: ReactNode;
-  action?: ReactNode;
+  children?: ReactNode | undefined;
+  action?: ReactNode | undefined;
 }
 
 /** Nothing is here yet: says what to do first. */

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 export interface FieldLabels {
   label: ReactNode;
   /** Below the field: what is meant, or an example. */
-  help?: ReactNode;
+  help?: ReactNode | undefined;
   /** Said beside the label; everything else must be filled in. */
   optional?: boolean | undefined;
 }
@@ -28,7 +28,15 @@ export function Field({ id, label, help, optional, error, children }: FieldProps
   );
 }
 
-export function FieldHelp({ id, help, error }: { id: string; help?: ReactNode; error?: string | undefined }) {
+export function FieldHelp({
+  id,
+  help,
+  error,
+}: {
+  id: string;
+  help?: ReactNode;
+  error?: string | undefined;
+}) {
   return (
     <>
       {help && (
@@ -46,7 +54,14 @@ export function FieldHelp({ id, help, error }: { id: string; help?: ReactNode; e
 }
 
 /** What describes a field to the ear: its unit, its help, its error. */
-export function describedBy(id: string, parts: { unit?: unknown; help?: unknown; error?: unknown }) {
-  const ids = [parts.unit && `${id}-unit`, parts.help && `${id}-help`, parts.error && `${id}-error`];
+export function describedBy(
+  id: string,
+  parts: { unit?: unknown; help?: unknown; error?: unknown },
+) {
+  const ids = [
+    parts.unit && `${id}-unit`,
+    parts.help && `${id}-help`,
+    parts.error && `${id}-error`,
+  ];
   return ids.filter(Boolean).join(' ') || undefined;
 }

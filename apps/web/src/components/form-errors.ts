@@ -6,12 +6,16 @@ export function listErrors(errors: FieldErrors, path = ''): FieldError[] {
   return Object.entries(errors).flatMap(([name, error]): FieldError[] => {
     if (!error || typeof error !== 'object' || name === 'ref') return [];
     const field = path === '' ? name : `${path}.${name}`;
-    if (typeof error.message === 'string' && error.message !== '') return [{ field, message: error.message }];
+    if (typeof error.message === 'string' && error.message !== '')
+      return [{ field, message: error.message }];
     return listErrors(error as FieldErrors, field);
   });
 }
 
 /** The API names fields as `steps.0.minutes`, `/steps/0/minutes` or with `body.` before it. */
 export function formField(field: string): string {
-  return field.replace(/^\//, '').replaceAll('/', '.').replace(/^body\./, '');
+  return field
+    .replace(/^\//, '')
+    .replaceAll('/', '.')
+    .replace(/^body\./, '');
 }

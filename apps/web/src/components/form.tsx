@@ -20,16 +20,16 @@ export interface FormProps<Schema extends BodySchema> {
   /** Sends it; whatever it throws is shown, and what was typed stays. */
   onSend: (values: z.input<Schema>) => Promise<unknown>;
   submitWord: string;
-  submitTone?: 'primary' | 'secondary' | 'danger';
-  submitSize?: 'normal' | 'bench';
+  submitTone?: 'primary' | 'secondary' | 'danger' | undefined;
+  submitSize?: 'normal' | 'bench' | undefined;
   /** Beside the submit button, such as a link back. */
-  actions?: ReactNode;
+  actions?: ReactNode | undefined;
   /** Under which it survives a reload; none for what must not be kept, such as passwords. */
-  draftKey?: string;
+  draftKey?: string | undefined;
   /** For an edit: reads the thing again after somebody else changed it, and gives what is there now. */
-  onReload?: () => Promise<DefaultValues<z.input<Schema>>>;
+  onReload?: (() => Promise<DefaultValues<z.input<Schema>>>) | undefined;
   /** Starts again with the defaults once it was sent, for adding one after the other. */
-  again?: boolean;
+  again?: boolean | undefined;
   children: ReactNode;
 }
 
@@ -78,7 +78,10 @@ export function Form<Schema extends BodySchema>(props: FormProps<Schema>) {
     draft.forget();
   }
 
-  const listed = listErrors(errors).map(({ field, message }) => ({ fieldId: fieldId(id, field), message }));
+  const listed = listErrors(errors).map(({ field, message }) => ({
+    fieldId: fieldId(id, field),
+    message,
+  }));
   const stale = problem?.status === 412;
   const failed = listed.length > 0 || (problem !== undefined && !stale);
   return (
@@ -97,7 +100,11 @@ export function Form<Schema extends BodySchema>(props: FormProps<Schema>) {
           {failed && (
             <ErrorSummary
               attempt={submitCount}
-              title={problem && problem.fieldErrors.length === 0 ? problem.detail : titleFor(listed.length)}
+              title={
+                problem && problem.fieldErrors.length === 0
+                  ? problem.detail
+                  : titleFor(listed.length)
+              }
               errors={listed}
             />
           )}

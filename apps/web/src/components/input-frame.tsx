@@ -4,7 +4,7 @@ import { classNames } from '../lib/class-names.ts';
 interface InputFrameProps {
   id: string;
   /** Inside the field, after what is typed: mm, in, oz, ft². */
-  unit?: ReactNode;
+  unit?: ReactNode | undefined;
   invalid: boolean;
   /** As wide as a figure needs, or as the column. */
   short?: boolean | undefined;

@@ -18,22 +18,32 @@ interface LayoutPictureProps {
   widthMm: number;
   heightMm: number;
   /** How many pieces the spoilage allowance will cost: the last ones are hatched. */
-  allowance?: number;
+  allowance?: number | undefined;
   /** Along which side the backbone ran. */
-  spine?: 'across' | 'down';
+  spine?: 'across' | 'down' | undefined;
   /** What is drawn, for the ear: "Layout of Heron crest tags". */
   title: string;
-  className?: string;
+  className?: string | undefined;
 }
 
 /** The real layout, to scale: people look at it before they read a number. */
 export function LayoutPicture(props: LayoutPictureProps) {
-  const { outlinePath, placements, widthMm, heightMm, allowance = 0, spine = 'across', title } = props;
+  const {
+    outlinePath,
+    placements,
+    widthMm,
+    heightMm,
+    allowance = 0,
+    spine = 'across',
+    title,
+  } = props;
   const { lengthUnit } = useWorkshop();
   const id = useId();
   const [measure, box] = usePathBox(outlinePath);
   const margin = Math.max(widthMm, heightMm) * 0.004;
-  const size = [widthMm, heightMm].map((side) => lengthFigure(String(side), lengthUnit)).join(' × ');
+  const size = [widthMm, heightMm]
+    .map((side) => lengthFigure(String(side), lengthUnit))
+    .join(' × ');
   const sign = lengthUnits[lengthUnit].sign;
   const firstHatched = placements.length - allowance;
   const hatched = allowance > 0 ? `; ${allowance} hatched for the spoilage allowance` : '';

@@ -15,7 +15,10 @@ export function LayoutPiece({ number, placement, outlineId, hatchId, box }: Layo
   const { x, y, rot } = placement;
   const turned = Math.abs((((rot % 360) + 360) % 360) - 180) < 90;
   const [middleX, middleY] = [box.x + box.width / 2, box.y + box.height / 2];
-  const size = Math.min(Math.min(box.width, box.height) * 0.36, Math.max(box.width, box.height) * 0.14);
+  const size = Math.min(
+    Math.min(box.width, box.height) * 0.36,
+    Math.max(box.width, box.height) * 0.14,
+  );
   return (
     <g transform={`translate(${x} ${y}) rotate(${rot})`}>
       <use

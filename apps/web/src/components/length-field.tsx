@@ -6,9 +6,9 @@ import type { WhenEmpty } from './use-field.ts';
 
 interface LengthFieldProps extends FieldLabels {
   name: string;
-  whenEmpty?: WhenEmpty;
+  whenEmpty?: WhenEmpty | undefined;
   /** Another unit than the shop's, where the trade has one. */
-  unit?: LengthUnit;
+  unit?: LengthUnit | undefined;
 }
 
 /** A length in the shop's unit: 5.5, 5½ and 5 1/2 are the same. Its value is mm. */

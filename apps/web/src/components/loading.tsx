@@ -13,11 +13,14 @@ export function PageLoading() {
 }
 
 /** Holds the place of something that is on its way. */
-export function Skeleton({ className }: { className?: string }) {
+export function Skeleton({ className }: { className?: string | undefined }) {
   return (
     <div
       aria-hidden="true"
-      className={classNames('rounded bg-stitch/30 motion-safe:animate-pulse', className ?? 'h-5 w-full')}
+      className={classNames(
+        'rounded bg-stitch/30 motion-safe:animate-pulse',
+        className ?? 'h-5 w-full',
+      )}
     />
   );
 }

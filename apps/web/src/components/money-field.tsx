@@ -4,7 +4,7 @@ import type { TextFieldProps } from './text-field.tsx';
 
 interface MoneyFieldProps extends Omit<TextFieldProps, 'type' | 'inputMode' | 'unit'> {
   /** What one price is for: "ft²", "piece", "hour". */
-  per?: string;
+  per?: string | undefined;
 }
 
 /** An amount or a unit price in the workshop's currency. */

@@ -3,20 +3,35 @@ import type { ReactNode } from 'react';
 import { classNames } from '../lib/class-names.ts';
 
 const tones = {
-  attention: { box: 'border-brass bg-brass-pale', icon: TriangleAlert, ink: 'text-brass', word: 'Attention' },
-  danger: { box: 'border-oxblood bg-oxblood-pale', icon: OctagonAlert, ink: 'text-oxblood', word: 'Warning' },
+  attention: {
+    box: 'border-brass bg-brass-pale',
+    icon: TriangleAlert,
+    ink: 'text-brass',
+    word: 'Attention',
+  },
+  danger: {
+    box: 'border-oxblood bg-oxblood-pale',
+    icon: OctagonAlert,
+    ink: 'text-oxblood',
+    word: 'Warning',
+  },
   info: { box: 'border-slate bg-slate-pale', icon: Info, ink: 'text-slate', word: 'Note' },
-  ok: { box: 'border-verdigris bg-verdigris-pale', icon: CircleCheck, ink: 'text-verdigris', word: 'Done' },
+  ok: {
+    box: 'border-verdigris bg-verdigris-pale',
+    icon: CircleCheck,
+    ink: 'text-verdigris',
+    word: 'Done',
+  },
 };
 
 interface NoticeProps {
-  tone?: keyof typeof tones;
-  title?: ReactNode;
+  tone?: keyof typeof tones | undefined;
+  title?: ReactNode | undefined;
   /** Read out when it appears: for what answers something the person just did. */
-  live?: boolean;
-  actions?: ReactNode;
-  className?: string;
-  children?: ReactNode;
+  live?: boolean | undefined;
+  actions?: ReactNode | undefined;
+  className?: string | undefined;
+  children?: ReactNode | undefined;
 }
 
 /** Something the person should know here: a word, a shape and a colour. */

@@ -5,8 +5,8 @@ import { emptied, useField, type WhenEmpty } from './use-field.ts';
 
 export interface NumberFieldProps extends FieldLabels {
   name: string;
-  unit?: ReactNode;
-  whenEmpty?: WhenEmpty;
+  unit?: ReactNode | undefined;
+  whenEmpty?: WhenEmpty | undefined;
 }
 
 /** A whole number, such as pieces. What is no number stays as typed, so that the contract's sentence names it. */

@@ -8,12 +8,17 @@ interface OutlinePictureProps {
   outlinePath: string;
   title: string;
   /** With its width and height below it. */
-  dimensions?: boolean;
-  className?: string;
+  dimensions?: boolean | undefined;
+  className?: string | undefined;
 }
 
 /** One piece as the cutting die leaves it, to scale within its frame. */
-export function OutlinePicture({ outlinePath, title, dimensions = true, className }: OutlinePictureProps) {
+export function OutlinePicture({
+  outlinePath,
+  title,
+  dimensions = true,
+  className,
+}: OutlinePictureProps) {
   const { lengthUnit } = useWorkshop();
   const id = useId();
   const [measure, box] = usePathBox(outlinePath);

@@ -3,9 +3,9 @@ import { PageTitle } from './page-title.tsx';
 
 interface PageHeaderProps {
   title: string;
-  subtitle?: ReactNode;
+  subtitle?: ReactNode | undefined;
   /** The place's one main action, and little else. */
-  action?: ReactNode;
+  action?: ReactNode | undefined;
 }
 
 /** What this place is and the one thing to do here; names the browser's tab too. */

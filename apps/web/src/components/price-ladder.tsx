@@ -86,7 +86,9 @@ export function PriceLadder({ rungs, target, currency, chosen, onChoose }: Price
               />
             </td>
             <td className="pl-3 text-right font-semibold">{numberText(rung.perBenchHour, 0)}</td>
-            <td className="pr-2 pl-3 text-right font-semibold">{numberText(rung.perHourAllIn, 0)}</td>
+            <td className="pr-2 pl-3 text-right font-semibold">
+              {numberText(rung.perHourAllIn, 0)}
+            </td>
           </tr>
         ))}
       </tbody>

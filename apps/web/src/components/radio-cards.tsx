@@ -7,16 +7,16 @@ import { useField } from './use-field.ts';
 export interface RadioCard {
   value: string | number;
   label: ReactNode;
-  detail?: ReactNode;
+  detail?: ReactNode | undefined;
   /** At the right: a price, or "included". */
-  aside?: ReactNode;
+  aside?: ReactNode | undefined;
 }
 
 interface RadioCardsProps extends FieldLabels {
   name: string;
   cards: readonly RadioCard[];
   /** Side by side where there is room. */
-  across?: boolean;
+  across?: boolean | undefined;
 }
 
 /** One of a few, all in sight. */
@@ -47,7 +47,9 @@ export function RadioCards({ name, cards, across, label, help, optional }: Radio
                 />
                 <span className="grow">
                   <span className="font-semibold">{card.label}</span>
-                  {card.detail && <span className="block text-sm text-ink-soft">{card.detail}</span>}
+                  {card.detail && (
+                    <span className="block text-sm text-ink-soft">{card.detail}</span>
+                  )}
                 </span>
                 {card.aside && <span className="font-semibold">{card.aside}</span>}
               </label>

@@ -23,12 +23,14 @@ function wordsFor(error: unknown): Words {
     return { title, sentence: error.detail, mayPass: error.isPassing, reference: error.requestId };
   }
   if (isRouteErrorResponse(error)) {
-    const sentence = typeof error.data === 'string' && error.data !== '' ? error.data : error.statusText;
+    const sentence =
+      typeof error.data === 'string' && error.data !== '' ? error.data : error.statusText;
     return { title: titles[error.status] ?? 'That did not work', sentence, mayPass: false };
   }
   return {
     title: 'This page did not work',
-    sentence: 'Nothing you saved is lost. Try again; if it happens twice, tell whoever looks after the program.',
+    sentence:
+      'Nothing you saved is lost. Try again; if it happens twice, tell whoever looks after the program.',
     mayPass: true,
   };
 }
@@ -38,7 +40,7 @@ export function RouteError() {
   const { title, sentence, mayPass, reference } = wordsFor(useRouteError());
   const navigate = useNavigate();
   return (
-    <div className="mx-auto max-w-prose p-6">
+    <div className="max-w-prose">
       <PageTitle>{title}</PageTitle>
       <h1 tabIndex={-1}>{title}</h1>
       <p className="mt-2">{sentence}</p>

@@ -4,7 +4,7 @@ export interface SectionLink {
   to: string;
   word: string;
   /** Only when exactly there, not in the places below it. */
-  end?: boolean;
+  end?: boolean | undefined;
 }
 
 /** The places within a room; the one where the person stands is underlined by a stitch. */

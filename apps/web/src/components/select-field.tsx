@@ -12,9 +12,9 @@ interface SelectFieldProps extends FieldLabels {
   name: string;
   choices: readonly Choice[];
   /** Shown while nothing is chosen: "Choose a leather". */
-  placeholder?: string;
-  whenEmpty?: WhenEmpty;
-  short?: boolean;
+  placeholder?: string | undefined;
+  whenEmpty?: WhenEmpty | undefined;
+  short?: boolean | undefined;
 }
 
 /** One of several, with the device's own list. Numbers among the values stay numbers. */

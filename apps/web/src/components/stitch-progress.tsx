@@ -6,8 +6,8 @@ interface StitchProgressProps {
   done: number;
   of: number;
   /** How many stitches to draw. */
-  stitches?: number;
-  className?: string;
+  stitches?: number | undefined;
+  className?: string | undefined;
 }
 
 /** Progress as a seam: stitched through, half stitched, still to stitch. */

@@ -4,8 +4,8 @@ import { emptied, useField, type WhenEmpty } from './use-field.ts';
 
 interface TextAreaProps extends FieldLabels {
   name: string;
-  rows?: number;
-  whenEmpty?: WhenEmpty;
+  rows?: number | undefined;
+  whenEmpty?: WhenEmpty | undefined;
 }
 
 /** Several lines, such as a note or an address. */
@@ -15,7 +15,9 @@ export function TextArea({ name, rows = 4, whenEmpty = 'text', ...labels }: Text
     <Field id={id} error={error} {...labels}>
       <InputFrame id={id} invalid={error !== undefined}>
         <textarea
-          {...register(name, { setValueAs: (value: unknown) => (value === '' ? emptied(whenEmpty) : value) })}
+          {...register(name, {
+            setValueAs: (value: unknown) => (value === '' ? emptied(whenEmpty) : value),
+          })}
           id={id}
           rows={rows}
           aria-invalid={error !== undefined}

@@ -3,23 +3,37 @@ import { classNames } from '../lib/class-names.ts';
 
 interface TicketProps {
   /** Q-0241, J-0198; without one the eyelet stands alone. */
-  number?: ReactNode;
+  number?: ReactNode | undefined;
   title: ReactNode;
   /** The title's level; a page's own ticket carries the h1. */
-  level?: 1 | 2 | 3;
-  detail?: ReactNode;
+  level?: 1 | 2 | 3 | undefined;
+  detail?: ReactNode | undefined;
   /** Figures with their words, such as in hands and state: see TicketFact. */
-  facts?: ReactNode;
-  actions?: ReactNode;
-  children?: ReactNode;
-  className?: string;
+  facts?: ReactNode | undefined;
+  actions?: ReactNode | undefined;
+  children?: ReactNode | undefined;
+  className?: string | undefined;
 }
 
 /** A card of manila stock with a punched eyelet: quotes, orders, jobs, and what waits to be done. */
-export function Ticket({ number, title, level = 2, detail, facts, actions, children, className }: TicketProps) {
+export function Ticket({
+  number,
+  title,
+  level = 2,
+  detail,
+  facts,
+  actions,
+  children,
+  className,
+}: TicketProps) {
   const Heading = `h${level}` as const;
   return (
-    <article className={classNames('ticket relative rounded bg-manila py-3.5 pr-4 pl-13 shadow-card', className)}>
+    <article
+      className={classNames(
+        'ticket relative rounded bg-manila py-3.5 pr-4 pl-13 shadow-card',
+        className,
+      )}
+    >
       <Eyelet />
       <div className="flex flex-wrap items-center gap-x-6 gap-y-3">
         <div className="min-w-0 grow basis-56">

@@ -14,7 +14,7 @@ export interface WaterfallLine {
 interface WaterfallProps {
   label: string;
   lines: readonly WaterfallLine[];
-  places?: number;
+  places?: number | undefined;
 }
 
 const bars = { price: 'bg-slate', bought: 'bg-russet/75', work: 'bg-edge', left: 'bg-verdigris' };
@@ -22,14 +22,24 @@ const bars = { price: 'bg-slate', bought: 'bg-russet/75', work: 'bg-edge', left:
 /** From the price to what is left: each bar takes its part away, where the one above it ended. */
 export function Waterfall({ label, lines, places = 2 }: WaterfallProps) {
   const price = new Decimal(lines[0]?.amount ?? 0);
-  const scale = Decimal.max(price, ...lines.map((line) => new Decimal(line.amount).abs()), '0.0001');
+  const scale = Decimal.max(
+    price,
+    ...lines.map((line) => new Decimal(line.amount).abs()),
+    '0.0001',
+  );
   const share = (amount: Decimal.Value) => new Decimal(amount).div(scale).times(100).toNumber();
   return (
     <table className="w-full" aria-label={label}>
       <tbody>
         {placed(lines, price).map(({ line, start, length }) => (
           <tr key={line.label} className="h-9">
-            <th scope="row" className={classNames('pr-3 text-left', line.kind === 'left' ? 'font-bold' : 'font-normal')}>
+            <th
+              scope="row"
+              className={classNames(
+                'pr-3 text-left',
+                line.kind === 'left' ? 'font-bold' : 'font-normal',
+              )}
+            >
               <LineName line={line} />
             </th>
             <td className="w-1/2 py-1" aria-hidden="true">
@@ -38,10 +48,15 @@ export function Waterfall({ label, lines, places = 2 }: WaterfallProps) {
                   'block h-3.5 rounded-[2px]',
                   line.kind === 'left' && length.isNeg() ? 'broken' : bars[line.kind],
                 )}
-                style={{ marginLeft: `${share(start)}%`, width: `${Math.max(share(length.abs()), 0.6)}%` }}
+                style={{
+                  marginLeft: `${share(start)}%`,
+                  width: `${Math.max(share(length.abs()), 0.6)}%`,
+                }}
               />
             </td>
-            <td className="pl-3 text-right font-semibold whitespace-nowrap">{moneyText(line.amount, places)}</td>
+            <td className="pl-3 text-right font-semibold whitespace-nowrap">
+              {moneyText(line.amount, places)}
+            </td>
           </tr>
         ))}
       </tbody>
@@ -54,7 +69,8 @@ function placed(lines: readonly WaterfallLine[], price: Decimal) {
   let rest = price;
   return lines.map((line) => {
     const length = new Decimal(line.amount);
-    if (line.kind === 'price' || line.kind === 'left') return { line, start: new Decimal(0), length };
+    if (line.kind === 'price' || line.kind === 'left')
+      return { line, start: new Decimal(0), length };
     rest = rest.minus(length);
     return { line, start: Decimal.max(rest, 0), length };
   });

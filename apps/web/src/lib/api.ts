@@ -24,9 +24,9 @@ export type CallInput<E extends Endpoint> = Given<'params', ParamsOf<E>> &
   };
 
 type LooseInput = {
-  params?: unknown;
-  query?: unknown;
-  body?: unknown;
+  params?: unknown | undefined;
+  query?: unknown | undefined;
+  body?: unknown | undefined;
   ifMatch?: number | undefined;
   idempotencyKey?: string | undefined;
   signal?: AbortSignal | undefined;

@@ -1,5 +1,12 @@
 import { Decimal } from 'decimal.js';
-import { areaFigure, areaUnits, lengthFigure, lengthUnits, type AreaUnit, type LengthUnit } from './units.ts';
+import {
+  areaFigure,
+  areaUnits,
+  lengthFigure,
+  lengthUnits,
+  type AreaUnit,
+  type LengthUnit,
+} from './units.ts';
 
 const minus = '−';
 const narrowSpace = '\u202f';

@@ -17,7 +17,12 @@ export const queryClient: QueryClient = new QueryClient({
     },
   }),
   defaultOptions: {
-    queries: { retry: mayPass, staleTime: 10_000, refetchOnWindowFocus: true, networkMode: 'always' },
+    queries: {
+      retry: mayPass,
+      staleTime: 10_000,
+      refetchOnWindowFocus: true,
+      networkMode: 'always',
+    },
     mutations: { retry: false, networkMode: 'always' },
   },
 });

@@ -46,9 +46,14 @@ export function readArea(text: string, unit: AreaUnit): string | undefined {
   return readMixedNumber(text)?.times(areaUnits[unit].mm2).toDecimalPlaces(3).toFixed();
 }
 
-/** What was typed in the shop's unit, as mm to a millionth; undefined if it is no length. */
+/**
+ * What was typed in the shop's unit, or in the one written after it (11 in, 4 3/8", 95 mm), as mm to a millionth;
+ * undefined if it is no length.
+ */
 export function readLength(text: string, unit: LengthUnit): string | undefined {
-  return readMixedNumber(text)?.times(lengthUnits[unit].mm).toDecimalPlaces(6).toFixed();
+  const [, figure = text, written] = /^(.*?)\s*(mm|in|")$/.exec(text.trim()) ?? [];
+  const used = written === undefined ? unit : written === 'mm' ? 'mm' : 'in';
+  return readMixedNumber(figure)?.times(lengthUnits[used].mm).toDecimalPlaces(6).toFixed();
 }
 
 /** An area in the shop's unit, without its sign. */
@@ -57,7 +62,11 @@ export function areaFigure(areaMm2: string, unit: AreaUnit, places = 2): string 
 }
 
 /** A length in the shop's unit, without its sign. */
-export function lengthFigure(lengthMm: string, unit: LengthUnit, places = unit === 'mm' ? 1 : 2): string {
+export function lengthFigure(
+  lengthMm: string,
+  unit: LengthUnit,
+  places = unit === 'mm' ? 1 : 2,
+): string {
   return new Decimal(lengthMm).div(lengthUnits[unit].mm).toDecimalPlaces(places).toFixed();
 }
 

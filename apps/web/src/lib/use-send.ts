@@ -7,8 +7,8 @@ import { randomKey } from './random-key.ts';
 
 interface SendOptions<E extends Endpoint> {
   /** What must be read again afterwards: everything but the session, unless said. */
-  invalidates?: readonly QueryKey[];
-  onSent?: (reply: ReplyOf<E>) => unknown;
+  invalidates?: readonly QueryKey[] | undefined;
+  onSent?: ((reply: ReplyOf<E>) => unknown) | undefined;
 }
 
 /**

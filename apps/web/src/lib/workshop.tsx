@@ -6,7 +6,13 @@ export type Workshop = NonNullable<Session['workshop']>;
 const WorkshopContext = createContext<Workshop | undefined>(undefined);
 
 /** Gives every screen below it the workshop's currency, units and day. */
-export function WorkshopProvider({ workshop, children }: { workshop: Workshop; children: ReactNode }) {
+export function WorkshopProvider({
+  workshop,
+  children,
+}: {
+  workshop: Workshop;
+  children: ReactNode;
+}) {
   return <WorkshopContext value={workshop}>{children}</WorkshopContext>;
 }
 

@@ -48,7 +48,6 @@ export function positions(start: number, period: number, free: number): { first:
  */
 export function bestFit(piece: Piece, cell: Cell, room: Room): Fit {
   const best: Fit = { cell, x: 0, y: 0, score: 0 };
-  if (room.width + 1e-6 < piece.width || room.height + 1e-6 < piece.height) return best;
   const startsX = distinct(cell.members.map((each) => -each.x - piece.corner[each.turn].x));
   const startsY = distinct(cell.members.map((each) => -each.y - piece.corner[each.turn].y));
   for (const y of startsY) {

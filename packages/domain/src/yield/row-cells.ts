@@ -12,18 +12,18 @@ interface Row {
 const shiftSteps = 24;
 /** How finely the height of a half-turned neighbour is tried. */
 const liftSteps = 24;
+/** How much worse than the densest an arrangement may be to be looked at more closely. */
+const nearlyBest = 1.15;
 const refinements = [1 / 48, -1 / 48, 1 / 96, -1 / 96, 1 / 192, -1 / 192];
 
 /**
- * Every regular arrangement worth trying: straight rows; every other row shifted; every other row
- * half turned; every other piece half turned. Simpler ones come first, and win a tie.
+ * Straight rows, rows of which every other is shifted, and rows of which every other is half turned.
+ * Simpler ones come first, and win a tie.
  * @param halfTurnMatters false for outlines that look the same after half a turn
  */
 export function* rowCells(piece: Piece, room: Room, halfTurnMatters: boolean): Generator<Cell> {
   yield* straightAndShifted(piece, room, halfTurnMatters);
-  if (!halfTurnMatters) return;
-  yield* everyOtherRowTurned(piece, room);
-  yield* everyOtherPieceTurned(piece);
+  if (halfTurnMatters) yield* everyOtherRowTurned(piece, room);
 }
 
 function* straightAndShifted(
@@ -57,18 +57,23 @@ function* everyOtherRowTurned(piece: Piece, room: Room): Generator<Cell> {
   }
 }
 
-function* everyOtherPieceTurned(piece: Piece): Generator<Cell> {
-  const lifts = range(-liftSteps, liftSteps).map((at) => (at / liftSteps) * piece.height);
-  const fractions = range(0, 7).map((at) => at / 8);
+/**
+ * Rows of which every other piece is half turned, at every height that its neighbour can have. They
+ * do not depend on the room. Shifted rows are tried only where straight ones are nearly the densest.
+ */
+export function pairCells(piece: Piece): Cell[] {
   const cellAt = (lift: number, fraction: number): Cell => {
     const row = pairRow(piece, lift);
     return stack(piece, row, row, fraction * row.period, 'every other piece');
   };
-  const best = densest(lifts, (lift) => cellAt(lift, 0));
-  const finer = refinements.map((by) => best + by * 2 * piece.height);
-  for (const lift of [...lifts, ...finer]) {
-    for (const fraction of fractions) yield cellAt(lift, fraction);
-  }
+  const coarse = range(-liftSteps, liftSteps).map((at) => (at / liftSteps) * piece.height);
+  const best = densest(coarse, (lift) => cellAt(lift, 0));
+  const lifts = [...coarse, ...refinements.map((by) => best + by * 2 * piece.height)];
+  const straight = lifts.map((lift) => cellAt(lift, 0));
+  const least = Math.min(...straight.map(areaPerPiece));
+  const promising = lifts.filter((_, at) => areaPerPiece(straight[at] as Cell) <= nearlyBest * least);
+  const shifted = promising.flatMap((lift) => range(1, 7).map((at) => cellAt(lift, at / 8)));
+  return [...straight, ...shifted];
 }
 
 const alone = (turn: HalfTurns) => ({ turn, x: 0, y: 0 });
@@ -146,9 +151,11 @@ function rowStep(piece: Piece, below: Row, above: Row, shift: number): number {
 function densest(values: number[], cellAt: (value: number) => Cell): number {
   let best = { value: values[0] ?? 0, area: Infinity };
   for (const value of values) {
-    const { periodX, periodY, members } = cellAt(value);
-    const area = (periodX * periodY) / members.length;
+    const area = areaPerPiece(cellAt(value));
     if (area < best.area - 1e-9) best = { value, area };
   }
   return best.value;
 }
+
+const areaPerPiece = ({ periodX, periodY, members }: Cell): number =>
+  (periodX * periodY) / members.length;

@@ -10,7 +10,7 @@ import type { Context } from '../../context.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
-import { notFound } from '../../http/problem.ts';
+import { invalid, notFound } from '../../http/problem.ts';
 import { serve } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
@@ -37,6 +37,7 @@ export function customerRoutes(context: Context): Router {
   serve(router, context, readCustomer, async (work, { params }) => toReply(await find(work, params.id)));
 
   serve(router, context, addCustomer, async (work, { body }) => {
+    await requireOwnName(work, body.name);
     const customer = work.em.create(Customer, { ...body, createdAt: work.now.toISOString() });
     await work.em.flush();
     await logDeed(work, {
@@ -50,6 +51,7 @@ export function customerRoutes(context: Context): Router {
   serve(router, context, changeCustomer, async (work, { params, body, ifMatch }) => {
     const customer = await find(work, params.id);
     await requireVersion(work.em, { kind: 'customer', id: customer.id, version: customer.version }, ifMatch);
+    if (body.name !== undefined) await requireOwnName(work, body.name, customer.id);
     assignDefined(customer, body);
     await work.em.flush();
     await logDeed(work, {
@@ -70,6 +72,12 @@ async function find(work: Work, id: number): Promise<Customer> {
   const customer = await work.em.findOne(Customer, id);
   if (customer === null) throw notFound('customer');
   return customer;
+}
+
+async function requireOwnName(work: Work, name: string, own = 0): Promise<void> {
+  if ((await work.em.findOne(Customer, { name, id: { $ne: own } })) === null) return;
+  const message = 'There is a customer of that name already. Open that one, or add what tells the two apart.';
+  throw invalid([{ field: 'name', message }]);
 }
 
 function toReply(customer: Customer): CustomerReply {

@@ -19,11 +19,17 @@ export function hardwareRoutes(context: Context): Router {
 
   serve(router, context, listHardware, async ({ em }, { query }) => {
     const { cursor, limit, ...filters } = query;
-    const rows = await readHardwareList(em, { ...filters, below: readCursor(cursor), limit: limit + 1 });
+    const rows = await readHardwareList(em, {
+      ...filters,
+      below: readCursor(cursor),
+      limit: limit + 1,
+    });
     return toPage(rows, limit, (row) => row.id);
   });
 
-  serve(router, context, readHardware, async ({ em }, { params }) => readOneHardware(em, params.id));
+  serve(router, context, readHardware, async ({ em }, { params }) =>
+    readOneHardware(em, params.id),
+  );
 
   serve(router, context, addHardware, async (work, { body }) => {
     await requireFreeName(work.em, Hardware, body.name);
@@ -37,7 +43,11 @@ export function hardwareRoutes(context: Context): Router {
   serve(router, context, changeHardware, async (work, { params, body, ifMatch }) => {
     const hardware = await work.em.findOne(Hardware, params.id);
     if (hardware === null) throw notFound('hardware');
-    await requireVersion(work.em, { kind: 'hardware', id: hardware.id, version: hardware.version }, ifMatch);
+    await requireVersion(
+      work.em,
+      { kind: 'hardware', id: hardware.id, version: hardware.version },
+      ifMatch,
+    );
     if (body.name !== undefined) await requireFreeName(work.em, Hardware, body.name, hardware.id);
     await requireSupplier(work, body.supplierId);
     const { unitPrice, ...plain } = body;
@@ -56,7 +66,12 @@ async function requireSupplier(work: Work, id: number | null | undefined): Promi
   throw invalid([{ field: 'supplierId', message: 'Choose a supplier from the list.' }]);
 }
 
-function log(work: Work, hardware: Hardware, verb: 'added' | 'changed', detail: Record<string, unknown> = {}) {
+function log(
+  work: Work,
+  hardware: Hardware,
+  verb: 'added' | 'changed',
+  detail: Record<string, unknown> = {},
+) {
   return logDeed(work, {
     action: `${verb} ${hardware.kind} ${hardware.name}`,
     subjectKind: 'hardware',

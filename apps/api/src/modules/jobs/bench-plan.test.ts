@@ -1,7 +1,7 @@
+import { addDays } from '@hidewright/domain';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { earliestDay, freeUntil, planDays, shortByPromise, type Bench, type HeldWork } from './bench-plan.ts';
-import { addDays } from './working-days.ts';
 
 /** Tuesday; 6 hours a day. */
 const bench: Bench = { today: '2026-12-01', perDay: 36_000, loggedToday: 0 };

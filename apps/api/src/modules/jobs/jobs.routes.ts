@@ -1,6 +1,67 @@
 import { Router } from 'express';
+import {
+  compareJob,
+  finishJob as finishJobEndpoint,
+  listJobs,
+  logBench as logBenchEndpoint,
+  pauseJob as pauseJobEndpoint,
+  readBenchHours,
+  readJob,
+  resumeJob as resumeJobEndpoint,
+  takeForJob as takeForJobEndpoint,
+} from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { compareFinished } from '../../flows/compare-job.ts';
+import { finishJob } from '../../flows/finish-job.ts';
+import { logBench } from '../../flows/log-bench.ts';
+import { pauseJob, resumeJob } from '../../flows/pause-job.ts';
+import { planBench } from '../../flows/plan-bench.ts';
+import { takeForJob } from '../../flows/take-for-job.ts';
+import { readTicket } from '../../flows/ticket/read-ticket.ts';
+import { readCursor, toPage } from '../../http/paging.ts';
+import { serve } from '../../http/serve.ts';
+import { findJobs } from './jobs.repository.ts';
 
-export function jobRoutes(_context: Context): Router {
-  return Router();
+export function jobRoutes(context: Context): Router {
+  const router = Router();
+
+  serve(router, context, listJobs, async ({ em }, { query }) => {
+    const { limit, q, state } = query;
+    const open = query.open === undefined ? undefined : query.open === 'true';
+    const rows = await findJobs(em, { below: readCursor(query.cursor), limit, q, state, open });
+    return toPage(rows, limit, (row) => row.id);
+  });
+
+  serve(router, context, readJob, ({ em }, { params }) => readTicket(em, params.id));
+
+  serve(router, context, logBenchEndpoint, async (work, { params, body }) => {
+    await logBench(work, params.id, body);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, takeForJobEndpoint, async (work, { params, body }) => {
+    await takeForJob(work, params.id, body);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, finishJobEndpoint, async (work, { params, body }) => {
+    await finishJob(work, params.id, body);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, pauseJobEndpoint, async (work, { params }) => {
+    await pauseJob(work, params.id);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, resumeJobEndpoint, async (work, { params }) => {
+    await resumeJob(work, params.id);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, compareJob, (work, { params }) => compareFinished(work, params.id));
+
+  serve(router, context, readBenchHours, (work, { query }) => planBench(work, query.days));
+
+  return router;
 }

@@ -7,6 +7,7 @@ import { StoredLayout } from '../layouts/layout.entity.ts';
 import { pathOf } from '../layouts/stored-layouts.ts';
 import { Quote } from '../quotes/quote.entity.ts';
 import { quotedOf } from '../quotes/quoted.ts';
+import { dayOf } from '../quotes/say-day.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { quoteBehind } from './customer-links.ts';
 
@@ -43,7 +44,7 @@ export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
     tooling,
     toolingTotal,
     agreedQuantity: quote.agreedQuantity,
-    agreedAt: quote.agreedAt,
+    agreedOn: quote.agreedAt === null ? null : dayOf(quote.agreedAt, workshop.timeZone),
   };
 }
 

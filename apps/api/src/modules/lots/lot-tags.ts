@@ -4,10 +4,17 @@ import { invalid } from '../../http/problem.ts';
 import { Lot } from './lot.entity.ts';
 
 /** @throws {Problem} 422 beside `field` when another lot hangs by that tag */
-export async function requireFreeTag(em: EntityManager, tag: string, field: string, id?: number): Promise<void> {
+export async function requireFreeTag(
+  em: EntityManager,
+  tag: string,
+  field: string,
+  id?: number,
+): Promise<void> {
   const lot = await em.findOne(Lot, { tag });
   if (lot === null || lot.id === id) return;
-  throw invalid([{ field, message: `The tag ${tag} is on another lot already. Choose another tag.` }]);
+  throw invalid([
+    { field, message: `The tag ${tag} is on another lot already. Choose another tag.` },
+  ]);
 }
 
 /** The next tag that no lot has: a person may have written some of them by hand. */

@@ -17,7 +17,17 @@ export class Lot {
   leatherId!: number;
 
   @Property({ type: 'text', columnType: 'text' })
-  form!: 'side' | 'hide' | 'back' | 'bend' | 'shoulder' | 'double shoulder' | 'belly' | 'panel' | 'strip' | 'offcut';
+  form!:
+    | 'side'
+    | 'hide'
+    | 'back'
+    | 'bend'
+    | 'shoulder'
+    | 'double shoulder'
+    | 'belly'
+    | 'panel'
+    | 'strip'
+    | 'offcut';
 
   /** As measured when it came, all panels of the bundle together. */
   @Property({ type: AreaType, columnType: 'integer' })

@@ -56,7 +56,9 @@ export async function readLotList(em: EntityManager, asked: Asked): Promise<LotR
     ...when(asked.id, 'id = ?'),
     ...when(asked.below, 'id < ?'),
     ...when(asked.leatherId, 'leather_id = ?'),
-    ...when(asked.q, 'tag LIKE ? OR leather_name LIKE ? OR place LIKE ?', (q) => Array<string>(3).fill(`%${q}%`)),
+    ...when(asked.q, 'tag LIKE ? OR leather_name LIKE ? OR place LIKE ?', (q) =>
+      Array<string>(3).fill(`%${q}%`),
+    ),
     ...when(asked.onRack, '(on_hand > 0) = ?', (onRack) => [onRack === 'yes' ? 1 : 0]),
   ]);
   const sql = `SELECT * FROM (${measured}) ${where} ORDER BY id DESC LIMIT ?`;
@@ -72,7 +74,8 @@ export async function readOneLot(em: EntityManager, id: number): Promise<LotRepl
 }
 
 const areaText = (thousandths: number) => unscaled(thousandths, 3).toFixed();
-const lengthText = (nanometres: number | null) => (nanometres === null ? null : unscaled(nanometres, 6).toFixed());
+const lengthText = (nanometres: number | null) =>
+  nanometres === null ? null : unscaled(nanometres, 6).toFixed();
 
 function toReply(row: Row): LotReply {
   return {

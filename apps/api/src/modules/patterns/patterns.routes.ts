@@ -32,7 +32,7 @@ export function patternRoutes(context: Context): Router {
     router,
     context,
     readPattern,
-    async (work, { params }, { version, worked }) =>
+    async (work, { params }, { version, worked }: Current) =>
       describePattern(work, await findPattern(work, params.id), version, worked.layout),
     ({ params }) => asItIs(context, params.id),
   );
@@ -40,7 +40,7 @@ export function patternRoutes(context: Context): Router {
   serve(router, context, listPatternVersions, async (work, { params }) => {
     const { id } = await findPattern(work, params.id);
     const versions = await work.em.find(PatternVersion, { patternId: id }, { orderBy: { number: 'desc' } });
-    return { items: versions.map(({ number, createdAt, createdBy, ...rest }) => ({ number, definition: definitionOf(rest), createdAt, createdBy })) };
+    return { items: versions.map(toVersion) };
   });
 
   serve(
@@ -68,12 +68,22 @@ export function patternRoutes(context: Context): Router {
   return router;
 }
 
+function toVersion(version: PatternVersion) {
+  const { number, createdAt, createdBy } = version;
+  return { number, definition: definitionOf(version), createdAt, createdBy };
+}
+
 async function reply(work: Work, pattern: Pattern, { layout }: WorkedLayout) {
   return describePattern(work, pattern, await latestVersion(work, pattern), layout);
 }
 
+interface Current {
+  version: PatternVersion;
+  worked: WorkedLayout;
+}
+
 /** The latest version with its layout, worked out again where the way of laying out has become better since. */
-async function asItIs(context: Context, patternId: number) {
+async function asItIs(context: Context, patternId: number): Promise<Current> {
   const reader = { em: context.orm.em.fork() };
   const version = await latestVersion(reader, await findPattern(reader, patternId));
   return { version, worked: await layoutFor(context, definitionOf(version)) };

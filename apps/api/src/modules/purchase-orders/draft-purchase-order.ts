@@ -1,5 +1,10 @@
 import { Decimal } from 'decimal.js';
-import type { addPurchaseOrder, BodyOf, changePurchaseOrder, PurchaseLineTyped } from '@hidewright/contract';
+import type {
+  addPurchaseOrder,
+  BodyOf,
+  changePurchaseOrder,
+  PurchaseLineTyped,
+} from '@hidewright/contract';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
 import { drawPaperNumber } from '../../db/counters.ts';
 import { invalid, notFound, wrongState } from '../../http/problem.ts';
@@ -8,6 +13,7 @@ import { logDeed } from '../activity/activity-log.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
+import { requireBookable } from './line-amount.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
 
@@ -49,7 +55,9 @@ export async function changeDraft(
   typed: BodyOf<typeof changePurchaseOrder>,
 ): Promise<void> {
   if (order.state !== 'draft') {
-    throw wrongState(`${order.number} is ${order.state}; only a draft can be changed. Draft another order.`);
+    throw wrongState(
+      `${order.number} is ${order.state}; only a draft can be changed. Draft another order.`,
+    );
   }
   const { lines, ...plain } = typed;
   if (plain.supplierId !== undefined) await requireSupplier(work, plain.supplierId);
@@ -68,7 +76,11 @@ export async function changeDraft(
  * Cancels an order of which nothing has come.
  * @throws {Problem} 409 when something has, or when it is closed already
  */
-export async function cancelPurchaseOrder(work: Work, order: PurchaseOrder, reason: string): Promise<void> {
+export async function cancelPurchaseOrder(
+  work: Work,
+  order: PurchaseOrder,
+  reason: string,
+): Promise<void> {
   if (order.state === 'part received') {
     const sentence = `Part of ${order.number} has come. Receive it with “nothing more is to come” instead.`;
     throw wrongState(sentence, ['receive']);
@@ -79,27 +91,45 @@ export async function cancelPurchaseOrder(work: Work, order: PurchaseOrder, reas
   const from = order.state;
   order.state = 'cancelled';
   await work.em.flush();
-  await log(work, order, `cancelled purchase order ${order.number}`, { from, to: 'cancelled', reason });
+  await log(work, order, `cancelled purchase order ${order.number}`, {
+    from,
+    to: 'cancelled',
+    reason,
+  });
 }
 
-function withoutUndefined<T extends object>(typed: T): { [K in keyof T]: Exclude<T[K], undefined> } {
+function withoutUndefined<T extends object>(
+  typed: T,
+): { [K in keyof T]: Exclude<T[K], undefined> } {
   const entries = Object.entries(typed).filter(([, value]) => value !== undefined);
   return Object.fromEntries(entries) as { [K in keyof T]: Exclude<T[K], undefined> };
 }
 
-async function writeLines(work: Work, order: PurchaseOrder, lines: PurchaseLineTyped[]): Promise<void> {
-  for (const [at, line] of lines.entries()) {
-    await requireThing(work, line, at);
-    work.em.create(PurchaseLine, {
-      purchaseOrderId: order.id,
-      position: at + 1,
-      unitPrice: new Decimal(line.unitPrice),
-      ...(line.of === 'leather'
-        ? { leatherId: line.leatherId, quantity: scaled(new Decimal(line.areaMm2), 3) }
-        : { hardwareId: line.hardwareId, quantity: line.quantity }),
-    });
+async function writeLines(
+  work: Work,
+  order: PurchaseOrder,
+  lines: PurchaseLineTyped[],
+): Promise<void> {
+  for (const [at, line] of lines.entries()) await requireThing(work, line, at);
+  const kept = lines.map(toKept);
+  requireBookable(kept);
+  for (const [at, line] of kept.entries()) {
+    work.em.create(PurchaseLine, { ...line, purchaseOrderId: order.id, position: at + 1 });
   }
   await work.em.flush();
+}
+
+/** A line as its table keeps it: leather in thousandths of mm², hardware in pieces. */
+function toKept(line: PurchaseLineTyped) {
+  const unitPrice = new Decimal(line.unitPrice);
+  return line.of === 'leather'
+    ? {
+        leatherId: line.leatherId,
+        hardwareId: null,
+        quantity: scaled(new Decimal(line.areaMm2), 3),
+        unitPrice,
+      }
+    : { leatherId: null, hardwareId: line.hardwareId, quantity: line.quantity, unitPrice };
 }
 
 async function requireThing(work: Work, line: PurchaseLineTyped, at: number): Promise<void> {
@@ -108,7 +138,9 @@ async function requireThing(work: Work, line: PurchaseLineTyped, at: number): Pr
     throw invalid([{ field: `lines.${at}.leatherId`, message: 'Choose a leather from the list.' }]);
   }
   if ((await work.em.findOne(Hardware, line.hardwareId)) !== null) return;
-  throw invalid([{ field: `lines.${at}.hardwareId`, message: 'Choose hardware or supplies from the list.' }]);
+  throw invalid([
+    { field: `lines.${at}.hardwareId`, message: 'Choose hardware or supplies from the list.' },
+  ]);
 }
 
 async function requireSupplier(work: Work, id: number): Promise<void> {
@@ -116,6 +148,11 @@ async function requireSupplier(work: Work, id: number): Promise<void> {
   throw invalid([{ field: 'supplierId', message: 'Choose a supplier from the list.' }]);
 }
 
-function log(work: Work, order: PurchaseOrder, action: string, detail: Record<string, unknown> = {}): Promise<void> {
+function log(
+  work: Work,
+  order: PurchaseOrder,
+  action: string,
+  detail: Record<string, unknown> = {},
+): Promise<void> {
   return logDeed(work, { action, subjectKind: 'purchase order', subjectId: order.id, detail });
 }

@@ -56,7 +56,12 @@ async function byId<T extends { id: number }>(rows: Promise<T[]>): Promise<Map<n
   return new Map((await rows).map((row) => [row.id, row]));
 }
 
-function toReply(order: PurchaseOrder, supplier: Supplier | undefined, lines: PurchaseLine[], names: Names): OrderReply {
+function toReply(
+  order: PurchaseOrder,
+  supplier: Supplier | undefined,
+  lines: PurchaseLine[],
+  names: Names,
+): OrderReply {
   return {
     id: order.id,
     number: order.number,
@@ -84,7 +89,10 @@ function toLine(line: PurchaseLine, names: Names): LineReply {
     of: ofLeather ? 'leather' : 'hardware',
     leatherId: line.leatherId,
     hardwareId: line.hardwareId,
-    name: names.leathers.get(line.leatherId ?? 0)?.name ?? names.hardware.get(line.hardwareId ?? 0)?.name ?? '',
+    name:
+      names.leathers.get(line.leatherId ?? 0)?.name ??
+      names.hardware.get(line.hardwareId ?? 0)?.name ??
+      '',
     areaMm2: area(line.quantity),
     receivedAreaMm2: area(line.received),
     quantity: pieces(line.quantity),

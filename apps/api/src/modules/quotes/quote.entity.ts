@@ -4,7 +4,7 @@ import { JsonText } from '../../db/columns/json-text.ts';
 /** An offer of a run at several quantities, with the snapshot it was priced from. */
 @Entity({ tableName: 'quote' })
 export class Quote {
-  [OptionalProps]?: 'revision' | 'message' | 'version';
+  [OptionalProps]?: 'revision' | 'overrides' | 'message' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -43,6 +43,10 @@ export class Quote {
   /** RunNumbers of the domain. */
   @Property({ type: JsonText, columnType: 'text' })
   numbers!: unknown;
+
+  /** What the owner set by hand in place of the shop's own values. */
+  @Property({ type: JsonText, columnType: 'text' })
+  overrides: { rejectPercent?: string; leatherPricePerFt2?: string } = {};
 
   @Property({ type: 'text', columnType: 'text' })
   message = '';

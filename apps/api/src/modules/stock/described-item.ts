@@ -19,7 +19,9 @@ export interface DescribedItem {
 
 /** @throws {Problem} 404 when there is no such lot or hardware */
 export async function describeItem(em: EntityManager, item: StockItem): Promise<DescribedItem> {
-  return item.lotId == null ? describeHardware(em, item.hardwareId) : describeLot(em, item.lotId);
+  return typeof item.lotId === 'number'
+    ? describeLot(em, item.lotId)
+    : describeHardware(em, item.hardwareId);
 }
 
 async function describeLot(em: EntityManager, id: number): Promise<DescribedItem> {

@@ -55,7 +55,10 @@ export async function freeOf(em: EntityManager, item: StockItem): Promise<Free> 
 }
 
 /** Puts on the rack what came in. */
-export async function receiveStock(work: Work, received: Received & StockItem): Promise<StockMovement> {
+export async function receiveStock(
+  work: Work,
+  received: Received & StockItem,
+): Promise<StockMovement> {
   requireQuantity(received.quantity);
   const { quantity, value, purchaseOrderId = null, reason = '' } = received;
   return move(work, received, { kind: 'receive', quantity, value, purchaseOrderId, reason });
@@ -65,14 +68,22 @@ export async function receiveStock(work: Work, received: Received & StockItem): 
  * Holds stock for a job.
  * @throws {Problem} 409 naming what is free when it is less
  */
-export async function reserveStock(work: Work, asked: JobQuantity & StockItem): Promise<Reservation> {
+export async function reserveStock(
+  work: Work,
+  asked: JobQuantity & StockItem,
+): Promise<Reservation> {
   requireQuantity(asked.quantity);
   const { free } = await freeOf(work.em, asked);
   if (asked.quantity > free) throw await tooLittle(work, asked, asked.quantity, free);
   const balance = await balanceOf(work.em, asked);
   balance.reserved += asked.quantity;
   const { jobId, quantity } = asked;
-  const reservation = work.em.create(Reservation, { ...keysOf(asked), jobId, quantity, open: quantity });
+  const reservation = work.em.create(Reservation, {
+    ...keysOf(asked),
+    jobId,
+    quantity,
+    open: quantity,
+  });
   await work.em.flush();
   return reservation;
 }
@@ -139,7 +150,10 @@ export async function adjustStock(
           value: quantity < 0 ? value.negated() : value,
           reason: asked.reason,
         });
-  return { movement, broken: asked.counted < reserved ? await openReservations(work.em, keysOf(asked)) : [] };
+  return {
+    movement,
+    broken: asked.counted < reserved ? await openReservations(work.em, keysOf(asked)) : [],
+  };
 }
 
 /** Lets go of everything that is still held for a job. */
@@ -207,7 +221,11 @@ async function costOf(em: EntityManager, item: StockItem, quantity: number): Pro
 }
 
 async function takenBy(em: EntityManager, item: StockItem, jobId: number): Promise<number> {
-  const moved = await em.find(StockMovement, { ...keysOf(item), jobId, kind: { $in: ['take', 'return'] } });
+  const moved = await em.find(StockMovement, {
+    ...keysOf(item),
+    jobId,
+    kind: { $in: ['take', 'return'] },
+  });
   return moved.reduce((sum, movement) => sum - movement.quantity, 0);
 }
 

@@ -23,6 +23,7 @@ export function shareOfCost(
   held: { onHand: number; value: Decimal; unitCost: Decimal },
 ): Decimal {
   const whole = new Exact(quantity);
-  const exact = held.onHand > 0 ? whole.times(held.value).dividedBy(held.onHand) : whole.times(held.unitCost);
+  const exact =
+    held.onHand > 0 ? whole.times(held.value).dividedBy(held.onHand) : whole.times(held.unitCost);
   return round(exact, 2);
 }

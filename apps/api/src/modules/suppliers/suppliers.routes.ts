@@ -34,7 +34,9 @@ export function supplierRoutes(context: Context): Router {
     return { items: items.map(toReply), next };
   });
 
-  serve(router, context, readSupplier, async (work, { params }) => toReply(await find(work, params.id)));
+  serve(router, context, readSupplier, async (work, { params }) =>
+    toReply(await find(work, params.id)),
+  );
 
   serve(router, context, addSupplier, async (work, { body }) => {
     await requireFreeName(work.em, Supplier, body.name);
@@ -46,7 +48,11 @@ export function supplierRoutes(context: Context): Router {
 
   serve(router, context, changeSupplier, async (work, { params, body, ifMatch }) => {
     const supplier = await find(work, params.id);
-    await requireVersion(work.em, { kind: 'supplier', id: supplier.id, version: supplier.version }, ifMatch);
+    await requireVersion(
+      work.em,
+      { kind: 'supplier', id: supplier.id, version: supplier.version },
+      ifMatch,
+    );
     if (body.name !== undefined) await requireFreeName(work.em, Supplier, body.name, supplier.id);
     assignDefined(supplier, body);
     await work.em.flush();
@@ -63,7 +69,12 @@ async function find(work: Work, id: number): Promise<Supplier> {
   return supplier;
 }
 
-function log(work: Work, supplier: Supplier, verb: 'added' | 'changed', detail: Record<string, unknown> = {}) {
+function log(
+  work: Work,
+  supplier: Supplier,
+  verb: 'added' | 'changed',
+  detail: Record<string, unknown> = {},
+) {
   return logDeed(work, {
     action: `${verb} supplier ${supplier.name}`,
     subjectKind: 'supplier',

@@ -2,7 +2,7 @@ import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { findTool } from './find-tool.ts';
 import { Impression } from './impression.entity.ts';
-import { Tool } from './tool.entity.ts';
+import type { Tool } from './tool.entity.ts';
 
 export interface Uses {
   toolId: number;
@@ -33,7 +33,7 @@ export async function addImpressions(work: Work, { toolId, uses, jobId, reason =
   });
   await work.em.flush();
   // Not through the entity: counting at the bench must not make the owner's open edit stale.
-  await work.em.nativeUpdate(Tool, { id: toolId }, { used });
+  await work.em.execute('UPDATE tool SET used = ? WHERE id = ?', [used, toolId]);
   await work.em.refresh(tool);
   return tool;
 }

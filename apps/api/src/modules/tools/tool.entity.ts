@@ -21,7 +21,7 @@ export class Tool {
   name!: string;
 
   @Property({ type: 'text', columnType: 'text' })
-  metal = '';
+  metal: '' | 'steel' | 'magnesium' | 'copper' | 'brass' = '';
 
   @Property({ type: MoneyType, columnType: 'integer' })
   cost!: Decimal;

@@ -1,9 +1,15 @@
 import type { RouteObject } from 'react-router-dom';
 
+const numberOf = (data: unknown) => (data as { number: string }).number;
+
 export const benchRoutes: RouteObject[] = [
   {
     path: '/bench',
     handle: { crumb: 'Bench' },
-    children: [{ index: true, lazy: () => import('./bench/index.tsx') }],
+    children: [
+      { index: true, lazy: () => import('./bench/index.tsx') },
+      { path: 'jobs/:id', handle: { crumb: numberOf }, lazy: () => import('./bench/job.tsx') },
+      { path: 'checks/:id', handle: { crumb: 'Can we make it?' }, lazy: () => import('./bench/check.tsx') },
+    ],
   },
 ];

@@ -1,9 +1,33 @@
 import type { RouteObject } from 'react-router-dom';
 
+const nameOf = (customer: unknown) => (customer as { name: string }).name;
+const numberOf = (quote: unknown) => (quote as { number: string }).number;
+
 export const counterRoutes: RouteObject[] = [
   {
     path: '/counter',
     handle: { crumb: 'Counter' },
-    children: [{ index: true, lazy: () => import('./counter/index.tsx') }],
+    children: [
+      { index: true, lazy: () => import('./counter/index.tsx') },
+      {
+        path: 'quotes',
+        handle: { crumb: 'Quotes' },
+        children: [
+          { index: true, lazy: () => import('./counter/quotes.tsx') },
+          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-quote.tsx') },
+          { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./counter/quote.tsx') },
+          { path: ':id/change', handle: { crumb: numberOf }, lazy: () => import('./counter/change-quote.tsx') },
+        ],
+      },
+      {
+        path: 'customers',
+        handle: { crumb: 'Customers' },
+        children: [
+          { index: true, lazy: () => import('./counter/customers.tsx') },
+          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-customer.tsx') },
+          { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./counter/customer.tsx') },
+        ],
+      },
+    ],
   },
 ];

@@ -1,9 +1,32 @@
 import type { RouteObject } from 'react-router-dom';
 
+const nameOf = (thing: unknown) => (thing as { name: string }).name;
+
 export const patternRoomRoutes: RouteObject[] = [
   {
     path: '/pattern-room',
     handle: { crumb: 'Pattern room' },
-    children: [{ index: true, lazy: () => import('./pattern-room/index.tsx') }],
+    children: [
+      { index: true, lazy: () => import('./pattern-room/index.tsx') },
+      {
+        path: 'patterns',
+        handle: { crumb: 'Patterns' },
+        children: [
+          { index: true, lazy: () => import('./pattern-room/patterns.tsx') },
+          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./pattern-room/new-pattern.tsx') },
+          { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/pattern.tsx') },
+          { path: ':id/change', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/change-pattern.tsx') },
+        ],
+      },
+      {
+        path: 'tooling',
+        handle: { crumb: 'Tooling' },
+        children: [
+          { index: true, lazy: () => import('./pattern-room/tooling.tsx') },
+          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./pattern-room/new-tool.tsx') },
+          { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/tool.tsx') },
+        ],
+      },
+    ],
   },
 ];

@@ -18,7 +18,13 @@ export function OpenShopForm({ onOpened }: { onOpened: () => void }) {
     >
       <TextField name="workshopName" label="Name of the shop" autoComplete="organization" />
       <TextField name="ownerName" label="Your name" autoComplete="name" />
-      <TextField name="email" type="email" label="E-mail address" help="You sign in with it." autoComplete="username" />
+      <TextField
+        name="email"
+        type="email"
+        label="E-mail address"
+        help="You sign in with it."
+        autoComplete="username"
+      />
       <TextField
         name="password"
         type="password"

@@ -1,0 +1,63 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { scaled } from '../db/columns/scaled-decimal.ts';
+import type { Bench, HeldWork } from '../modules/jobs/bench-plan.ts';
+import { JobStep } from '../modules/jobs/job-step.entity.ts';
+import { shareDone, stepLimits } from '../modules/jobs/step-limits.ts';
+import { Workshop } from '../modules/workshop/workshop.entity.ts';
+import type { Work } from '../work.ts';
+
+/** A job that is not finished, with what is still to do on it. */
+export interface OpenJob extends HeldWork {
+  number: string;
+  title: string;
+}
+
+interface OpenRow {
+  id: number;
+  number: string;
+  title: string;
+  promised_on: string;
+  cut_count: number;
+  containers: number;
+}
+
+/** Every job that holds bench hours, whatever its state: hours are held from taking on until it is finished. */
+export async function openJobs(em: EntityManager): Promise<OpenJob[]> {
+  const rows = await em.execute<OpenRow[]>(
+    `SELECT j.id, j.number, o.title, o.promised_on, j.cut_count, j.containers
+    FROM job j JOIN customer_order o ON o.id = j.order_id
+    WHERE j.state <> 'finished' AND o.state <> 'cancelled' ORDER BY j.id`,
+  );
+  const steps = await em.find(JobStep, { jobId: { $in: rows.map(({ id }) => id) } }, { orderBy: { position: 'asc' } });
+  return rows.map((row) => ({
+    jobId: row.id,
+    number: row.number,
+    title: row.title,
+    promisedOn: row.promised_on,
+    remaining: remainingOf(row, steps.filter(({ jobId }) => jobId === row.id)),
+  }));
+}
+
+/** By what is counted, not by the clock: a step half done has half its planned minutes to go. */
+function remainingOf(row: OpenRow, steps: JobStep[]): number {
+  const limits = stepLimits({ cutCount: row.cut_count, containers: row.containers }, steps);
+  return steps.reduce((sum, step, at) => {
+    const planned = scaled(step.plannedMinutes, 2);
+    return sum + Math.round(planned * (1 - shareDone(step, limits[at] ?? 0)));
+  }, 0);
+}
+
+/** The bench as it stands today. */
+export async function benchToday({ em, today }: Work): Promise<Bench> {
+  const { benchHoursPerDay } = await em.findOneOrFail(Workshop, 1);
+  const logged = await loggedOn(em, today);
+  return { today, perDay: scaled(benchHoursPerDay.times(60), 2), loggedToday: logged };
+}
+
+async function loggedOn(em: EntityManager, day: string): Promise<number> {
+  const [row] = await em.execute<[{ minutes: number }]>(
+    'SELECT COALESCE(SUM(minutes), 0) AS minutes FROM bench_log WHERE day = ?',
+    [day],
+  );
+  return Math.max(0, row.minutes);
+}

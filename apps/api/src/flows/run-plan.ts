@@ -1,0 +1,75 @@
+import { benchMinutes, priceRun, ticketSteps, toAtMost, type RunInput, type RunNumbers, type WorkPlan } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
+import { definitionOf } from '../modules/patterns/pattern-versions.ts';
+import type { Quote } from '../modules/quotes/quote.entity.ts';
+
+/** A step as the job will have it. */
+export interface PlannedStep {
+  name: string;
+  per: 'piece' | 'strike' | 'panel' | 'strip' | 'run';
+  setupMinutes: Decimal;
+  secondsPerUnit: Decimal;
+  rejectPercent: Decimal;
+  plannedMinutes: Decimal;
+}
+
+/** What a run of so many needs, by the numbers that its quote was priced with. */
+export interface RunPlan {
+  quantity: number;
+  cutCount: number;
+  containers: number;
+  patternId: number;
+  leatherId: number;
+  leatherAreaMm2: string;
+  hardware: { hardwareId: number; quantity: number }[];
+  steps: PlannedStep[];
+  plannedMinutes: Decimal;
+  needsDie: boolean;
+  needsPlate: boolean;
+  /** The run as it was priced, with this one quantity. */
+  input: RunInput;
+}
+
+/**
+ * Works a quote's run out again for one quantity, from the snapshot that the quote kept.
+ * @throws {InvalidInput | NotWorkable} when the quantity cannot be made
+ */
+export async function planRun(em: EntityManager, quote: Quote, quantity: number): Promise<RunPlan> {
+  const version = await em.findOneOrFail(PatternVersion, quote.patternVersionId);
+  const { leatherId, hardware, needsDie, needsPlate } = definitionOf(version);
+  const input = forOne(quote, quantity);
+  const [run] = priceRun(input).breaks;
+  if (run === undefined) throw new TypeError('One quantity has one rung');
+  const { cutCount, containers, leatherAreaMm2 } = run;
+  const steps = planSteps(input.work, { pieces: cutCount, containers });
+  return {
+    ...{ quantity, cutCount, containers, leatherAreaMm2, leatherId, needsDie, needsPlate, steps, input },
+    patternId: version.patternId,
+    hardware: hardware.map(({ hardwareId, perPiece }) => ({ hardwareId, quantity: perPiece * quantity })),
+    plannedMinutes: steps.reduce((sum, step) => sum.plus(step.plannedMinutes), new Decimal(0)),
+  };
+}
+
+/** At the price that was offered: alone, a rung could be suggested another than beside smaller and larger ones. */
+function forOne(quote: Quote, quantity: number): RunInput {
+  const { breaks } = quote.numbers as RunNumbers;
+  const typedPrice = breaks.find((each) => each.quantity === quantity)?.priceEach ?? null;
+  return { ...(quote.input as RunInput), breaks: [{ quantity, typedPrice }] };
+}
+
+/** Each step with its minutes, to the hundredth of a minute that a job keeps. */
+function planSteps(plan: WorkPlan, run: { pieces: number; containers: number }): PlannedStep[] {
+  const { bySteps } = benchMinutes(plan, run);
+  return ticketSteps(plan).map((step, at) => ({
+    name: step.name,
+    per: step.per,
+    setupMinutes: hundredths(step.setupMinutes),
+    secondsPerUnit: hundredths(step.secondsPerUnit),
+    rejectPercent: new Decimal(step.rejectPercent),
+    plannedMinutes: hundredths(bySteps[at]?.minutes ?? '0'),
+  }));
+}
+
+const hundredths = (exact: string): Decimal => new Decimal(toAtMost(new Decimal(exact), 2));

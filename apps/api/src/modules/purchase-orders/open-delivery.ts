@@ -1,0 +1,100 @@
+import { invalid, wrongState } from '../../http/problem.ts';
+import type { Work } from '../../work.ts';
+import { logDeed } from '../activity/activity-log.ts';
+import { findPurchaseOrder } from './draft-purchase-order.ts';
+import { PurchaseLine } from './purchase-line.entity.ts';
+import type { PurchaseOrder } from './purchase-order.entity.ts';
+
+type Came = { purchaseLineId: number | null } & ({ leatherId: number } | { hardwareId: number });
+
+/** A delivery that is being taken in: the order that it fills, line by line, or none. */
+export class OpenDelivery {
+  readonly #work: Work;
+  readonly #order: PurchaseOrder | null;
+  readonly #lines: PurchaseLine[];
+
+  private constructor(work: Work, order: PurchaseOrder | null, lines: PurchaseLine[]) {
+    this.#work = work;
+    this.#order = order;
+    this.#lines = lines;
+  }
+
+  /** @throws {Problem} 404, or 409 when the order awaits no delivery */
+  static async begin(work: Work, orderId: number | null): Promise<OpenDelivery> {
+    if (orderId === null) return new OpenDelivery(work, null, []);
+    const order = await findPurchaseOrder(work, orderId);
+    if (order.state !== 'sent' && order.state !== 'part received') throw awaitsNothing(order);
+    return new OpenDelivery(
+      work,
+      order,
+      await work.em.find(PurchaseLine, { purchaseOrderId: orderId }),
+    );
+  }
+
+  get orderId(): number | null {
+    return this.#order?.id ?? null;
+  }
+
+  /**
+   * Counts what came towards the line that ordered it, if it names one. Hides are never as large as was ordered, so
+   * the last one may go beyond; pieces are counted out and may not.
+   */
+  fill(came: Came, quantity: number, field: string): PurchaseLine | null {
+    if (came.purchaseLineId === null) return null;
+    const line = this.#lines.find(({ id }) => id === came.purchaseLineId);
+    const matches =
+      'leatherId' in came
+        ? came.leatherId === line?.leatherId
+        : came.hardwareId === line?.hardwareId;
+    if (line === undefined || !matches) {
+      throw invalid([
+        {
+          field: `${field}.purchaseLineId`,
+          message: 'Choose the line of this order that it belongs to.',
+        },
+      ]);
+    }
+    const open = line.quantity - line.received;
+    if (open <= 0) {
+      throw wrongState(
+        `Line ${line.position} of the order is complete. Receive what came beyond it without the order.`,
+      );
+    }
+    if (line.hardwareId !== null && quantity > open) {
+      const message = `${open} are still to come on this line. Receive what came beyond it without the order.`;
+      throw invalid([{ field: `${field}.quantity`, message }]);
+    }
+    line.received += quantity;
+    return line;
+  }
+
+  /** The order's state follows what has come; `nothingMore` closes it although something is missing. */
+  async finish(nothingMore: boolean): Promise<void> {
+    if (this.#order === null) return;
+    const order = this.#order;
+    const from = order.state;
+    if (this.#lines.every((line) => line.received === 0)) throw nothingCame(order);
+    const complete = this.#lines.every((line) => line.received >= line.quantity);
+    order.state = complete || nothingMore ? 'received' : 'part received';
+    await this.#work.em.flush();
+    await logDeed(this.#work, {
+      action: `received ${order.state === 'received' ? 'the last' : 'a part'} of purchase order ${order.number}`,
+      subjectKind: 'purchase order',
+      subjectId: order.id,
+      detail: { from, to: order.state, complete },
+    });
+  }
+}
+
+function awaitsNothing(order: PurchaseOrder) {
+  if (order.state === 'draft')
+    return wrongState(`${order.number} has not been sent. Send it first.`, ['send', 'cancel']);
+  return wrongState(`${order.number} is ${order.state}. Receive what came without the order.`, [
+    'receive without the order',
+  ]);
+}
+
+function nothingCame(order: PurchaseOrder) {
+  const sentence = `Nothing of ${order.number} has come. Say which of its lines came, or cancel it.`;
+  return wrongState(sentence, ['receive', 'cancel']);
+}

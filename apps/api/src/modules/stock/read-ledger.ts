@@ -1,0 +1,109 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+import type { StockMovement, StockReservation } from '@hidewright/contract';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { when, whereAll } from '../../db/sql-conditions.ts';
+import { moneyText } from '../../http/decimal-text.ts';
+
+interface Asked {
+  id?: number | undefined;
+  below?: number | undefined;
+  lotId?: number | undefined;
+  hardwareId?: number | undefined;
+  jobId?: number | undefined;
+  limit: number;
+}
+
+interface ItemRow {
+  id: number;
+  lot_id: number | null;
+  lot_tag: string | null;
+  hardware_id: number | null;
+  hardware_name: string | null;
+}
+
+interface MovementRow extends ItemRow {
+  at: string;
+  day: string;
+  kind: StockMovement['kind'];
+  quantity: number;
+  value: number;
+  job_number: string | null;
+  purchase_order_number: string | null;
+  reason: string;
+  actor_name: string;
+}
+
+interface ReservationRow extends ItemRow {
+  job_id: number;
+  job_number: string;
+  open: number;
+}
+
+const named = (table: string) => `
+  FROM ${table} m
+  LEFT JOIN lot ON lot.id = m.lot_id
+  LEFT JOIN hardware h ON h.id = m.hardware_id
+  LEFT JOIN job ON job.id = m.job_id`;
+
+const conditionsOf = (asked: Asked) => [
+  ...when(asked.id, 'm.id = ?'),
+  ...when(asked.below, 'm.id < ?'),
+  ...when(asked.lotId, 'm.lot_id = ?'),
+  ...when(asked.hardwareId, 'm.hardware_id = ?'),
+  ...when(asked.jobId, 'm.job_id = ?'),
+];
+
+/** Movements of the ledger with every name in them, newest first. */
+export async function readMovements(em: EntityManager, asked: Asked): Promise<StockMovement[]> {
+  const { where, values } = whereAll(conditionsOf(asked));
+  const rows = await em.execute<MovementRow[]>(
+    `SELECT m.*, lot.tag AS lot_tag, h.name AS hardware_name, job.number AS job_number,
+       p.number AS purchase_order_number
+     ${named('stock_movement')}
+     LEFT JOIN purchase_order p ON p.id = m.purchase_order_id
+     ${where} ORDER BY m.id DESC LIMIT ?`,
+    [...values, asked.limit],
+  );
+  return rows.map((row) => ({
+    ...itemOf(row, row.quantity),
+    at: row.at,
+    day: row.day,
+    kind: row.kind,
+    value: moneyText(unscaled(row.value, 2)),
+    jobNumber: row.job_number,
+    purchaseOrderNumber: row.purchase_order_number,
+    reason: row.reason,
+    actorName: row.actor_name,
+  }));
+}
+
+/** What is still held for jobs, newest first. */
+export async function readReservations(
+  em: EntityManager,
+  asked: Asked,
+): Promise<StockReservation[]> {
+  const { where, values } = whereAll([{ sql: 'm.open > 0', values: [] }, ...conditionsOf(asked)]);
+  const rows = await em.execute<ReservationRow[]>(
+    `SELECT m.*, lot.tag AS lot_tag, h.name AS hardware_name, job.number AS job_number
+     ${named('reservation')} ${where} ORDER BY m.id DESC LIMIT ?`,
+    [...values, asked.limit],
+  );
+  return rows.map((row) => ({
+    ...itemOf(row, row.open),
+    jobId: row.job_id,
+    jobNumber: row.job_number,
+  }));
+}
+
+function itemOf(row: ItemRow, quantity: number) {
+  const ofLot = row.lot_id !== null;
+  return {
+    id: row.id,
+    lotId: row.lot_id,
+    lotTag: row.lot_tag,
+    hardwareId: row.hardware_id,
+    hardwareName: row.hardware_name,
+    areaMm2: ofLot ? unscaled(quantity, 3).toFixed() : null,
+    quantity: ofLot ? null : quantity,
+  };
+}

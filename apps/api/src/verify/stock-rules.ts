@@ -1,0 +1,52 @@
+import { none, type Rule } from './rule.ts';
+
+const item = `CASE WHEN b.lot_id IS NULL THEN (SELECT name FROM hardware WHERE id = b.hardware_id)
+  ELSE (SELECT tag FROM lot WHERE id = b.lot_id) END`;
+
+export const stockRules: Rule[] = [
+  none(
+    'What is on hand equals the sum of its movements',
+    `SELECT ${item} || ' has ' || b.on_hand || ' on hand, its movements sum to ' || moved AS fault FROM (
+      SELECT b.*, (SELECT COALESCE(SUM(quantity), 0) FROM stock_movement m
+        WHERE m.lot_id IS b.lot_id AND m.hardware_id IS b.hardware_id) AS moved FROM stock_balance b) b
+    WHERE moved <> b.on_hand`,
+  ),
+  none(
+    'Everything that moved has a balance',
+    `SELECT 'a movement of ' || day || ' has no balance' AS fault FROM stock_movement m
+    WHERE NOT EXISTS (SELECT 1 FROM stock_balance b WHERE b.lot_id IS m.lot_id AND b.hardware_id IS m.hardware_id)`,
+  ),
+  none(
+    'What is held equals what the jobs hold',
+    `SELECT ${item} || ' has ' || b.reserved || ' held, its reservations sum to ' || held AS fault FROM (
+      SELECT b.*, (SELECT COALESCE(SUM(open), 0) FROM reservation r
+        WHERE r.lot_id IS b.lot_id AND r.hardware_id IS b.hardware_id) AS held FROM stock_balance b) b
+    WHERE held <> b.reserved`,
+  ),
+  none(
+    'A finished job holds nothing',
+    `SELECT j.number || ' is finished and still holds stock' AS fault FROM reservation r JOIN job j ON j.id = r.job_id
+    WHERE j.state = 'finished' AND r.open > 0`,
+  ),
+  none(
+    'A lot came in with the area that it was measured at, and at its cost',
+    `SELECT l.tag || ' was measured at ' || l.measured_area_mm2 || ' and received as ' || COALESCE(m.quantity, 0) AS fault
+    FROM lot l LEFT JOIN (SELECT lot_id, SUM(quantity) AS quantity, SUM(value) AS value FROM stock_movement
+      WHERE kind = 'receive' GROUP BY lot_id) m ON m.lot_id = l.id
+    WHERE m.quantity IS NOT l.measured_area_mm2 OR m.value IS NOT l.cost`,
+  ),
+  none(
+    'An order line counts as received what was received on it',
+    `SELECT p.number || ' line ' || n.position || ' says ' || n.received || ' received, the ledger says ' || came AS fault
+    FROM (SELECT n.*, (SELECT COALESCE(SUM(m.quantity), 0) FROM stock_movement m LEFT JOIN lot l ON l.id = m.lot_id
+        WHERE m.kind = 'receive' AND m.purchase_order_id = n.purchase_order_id
+          AND (m.hardware_id = n.hardware_id OR l.purchase_line_id = n.id)) AS came FROM purchase_line n) n
+    JOIN purchase_order p ON p.id = n.purchase_order_id
+    WHERE came <> n.received`,
+  ),
+  none(
+    'A tool’s uses equal the sum of its ledger',
+    `SELECT t.kind || ' ' || t.number || ' says ' || t.used || ' uses, its ledger ' || COALESCE(SUM(i.uses), 0) AS fault
+    FROM tool t LEFT JOIN impression i ON i.tool_id = t.id GROUP BY t.id HAVING COALESCE(SUM(i.uses), 0) <> t.used`,
+  ),
+];

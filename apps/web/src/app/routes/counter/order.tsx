@@ -1,0 +1,81 @@
+import type { Order } from '@hidewright/contract';
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
+import { Card } from '../../../components/card.tsx';
+import { KeyFigures } from '../../../components/key-figures.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
+import { RouteError } from '../../../components/route-error.tsx';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { Arrivals } from '../../../features/orders/components/arrivals.tsx';
+import { OrderFigures } from '../../../features/orders/components/order-figures.tsx';
+import { OrderTicket } from '../../../features/orders/components/order-ticket.tsx';
+import { ShipForm } from '../../../features/orders/components/ship-form.tsx';
+import { orderQuery } from '../../../features/orders/orders.queries.ts';
+import { sessionQuery } from '../../../features/session/session.queries.ts';
+import { countText } from '../../../lib/formatting.ts';
+import { queryClient } from '../../../lib/query-client.ts';
+
+export async function loader({ params }: LoaderFunctionArgs) {
+  return queryClient.ensureQueryData(orderQuery(Number(params['id'])));
+}
+
+export function Component() {
+  const { id } = useLoaderData<Order>();
+  const { data: order } = useSuspenseQuery(orderQuery(id));
+  const { data: session } = useSuspenseQuery(sessionQuery());
+  const role = session.person?.role;
+  return (
+    <div className="space-y-5">
+      <OrderTicket order={order} actions={role !== 'maker' && <InvoiceAction order={order} />} />
+      <div className="grid items-start gap-5 lg:grid-cols-2">
+        <Arrivals order={order} canNote={role === 'owner'} />
+        <JobCard order={order} canOpen={role !== 'bookkeeper'} />
+        <OrderFigures order={order} />
+        {order.state === 'packed' && role !== 'bookkeeper' && <ShipForm order={order} />}
+        <Card title="Where it comes from">
+          <p>
+            <TextLink to={`/counter/quotes/${order.quoteId}`}>{order.quoteNumber}</TextLink>, made from {order.patternName}.
+          </p>
+        </Card>
+      </div>
+    </div>
+  );
+}
+
+/** Once it is packed it can be invoiced. */
+function InvoiceAction({ order }: { order: Order }) {
+  const { invoice } = order;
+  if (invoice) return <LinkButton to={`/books/invoices/${invoice.id}`}>Invoice {invoice.number ?? 'draft'}</LinkButton>;
+  if (!['packed', 'part shipped', 'shipped'].includes(order.state)) return null;
+  return (
+    <LinkButton tone="primary" to={`/books/invoices/new?order=${order.id}`}>
+      Invoice it
+    </LinkButton>
+  );
+}
+
+function JobCard({ order, canOpen }: { order: Order; canOpen: boolean }) {
+  const { job } = order;
+  return (
+    <Card
+      title={`Ticket ${job.number}`}
+      aside={canOpen && <TextLink to={`/bench/jobs/${job.id}`}>Open the ticket</TextLink>}
+    >
+      <KeyFigures
+        figures={[
+          { word: 'State', figure: <StateMark state={job.state} /> },
+          { word: 'To cut', figure: countText(job.cutCount) },
+          ...(job.state === 'finished'
+            ? [
+                { word: 'Good', figure: countText(job.good) },
+                { word: 'Seconds', figure: countText(job.seconds) },
+              ]
+            : []),
+        ]}
+      />
+    </Card>
+  );
+}
+
+export const ErrorBoundary = RouteError;

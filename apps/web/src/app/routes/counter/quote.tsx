@@ -1,0 +1,75 @@
+import type { Quote } from '@hidewright/contract';
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
+import { PageTitle } from '../../../components/page-title.tsx';
+import { RouteError } from '../../../components/route-error.tsx';
+import { Stitch } from '../../../components/stitch.tsx';
+import { CustomerAnswer } from '../../../features/quotes/components/customer-answer.tsx';
+import { LayoutCard } from '../../../features/quotes/components/layout-card.tsx';
+import { OnePieceCard } from '../../../features/quotes/components/one-piece-card.tsx';
+import { OtherRevisions } from '../../../features/quotes/components/other-revisions.tsx';
+import { PriceBreaksCard } from '../../../features/quotes/components/price-breaks-card.tsx';
+import { QuantitiesCard } from '../../../features/quotes/components/quantities-card.tsx';
+import { QuoteActions } from '../../../features/quotes/components/quote-actions.tsx';
+import { rungAt } from '../../../features/quotes/components/quote-preview.tsx';
+import { QuoteTicket } from '../../../features/quotes/components/quote-ticket.tsx';
+import { quoteQuery } from '../../../features/quotes/quotes.queries.ts';
+import { sessionQuery } from '../../../features/session/session.queries.ts';
+import { queryClient } from '../../../lib/query-client.ts';
+
+export async function loader({ params }: LoaderFunctionArgs) {
+  return queryClient.ensureQueryData(quoteQuery(Number(params['id'])));
+}
+
+export function Component() {
+  const { id } = useLoaderData<Quote>();
+  const { data: quote } = useSuspenseQuery(quoteQuery(id));
+  const { data: session } = useSuspenseQuery(sessionQuery());
+  const [quantity, choose] = useQuantity(quote);
+  const isOwner = session.person?.role === 'owner';
+  const rung = quote.numbers?.breaks.find((each) => each.quantity === quantity);
+  return (
+    <>
+      <PageTitle>{`Quote ${quote.number}`}</PageTitle>
+      <QuoteTicket quote={quote} actions={isOwner && <QuoteActions quote={quote} />} />
+      <Stitch className="my-5" />
+      <div className="grid items-start gap-5 lg:grid-cols-2 xl:grid-cols-[minmax(0,25.5rem)_minmax(0,1fr)_minmax(0,20rem)]">
+        <LayoutCard
+          layout={quote.layout}
+          outlinePath={quote.outlinePath}
+          patternName={quote.patternName}
+          rung={rung}
+        />
+        <div className="space-y-5">
+          {quote.numbers && quote.input ? (
+            <PriceBreaksCard
+              numbers={quote.numbers}
+              target={quote.input.targetPerHour}
+              chosen={quantity}
+              onChoose={choose}
+            />
+          ) : (
+            <QuantitiesCard quote={quote} chosen={quantity} onChoose={choose} />
+          )}
+          {rung && quote.input && <OnePieceCard rung={rung} tooling={quote.input.tooling} />}
+        </div>
+        <div className="space-y-5 lg:col-span-2 xl:col-span-1">
+          <CustomerAnswer quote={quote} quantity={quantity} isOwner={isOwner} />
+          <OtherRevisions quote={quote} />
+        </div>
+      </div>
+    </>
+  );
+}
+
+/** The quantity that the page is about: the one agreed to, the one picked on the ladder, or the second. */
+function useQuantity(quote: Quote): [number, (quantity: number) => void] {
+  const [search, setSearch] = useSearchParams();
+  const picked = quote.agreedQuantity ?? (Number(search.get('pieces')) || undefined);
+  const quantity = rungAt(quote.breaks, picked)?.quantity ?? 0;
+  const choose = (next: number) =>
+    setSearch({ pieces: String(next) }, { replace: true, preventScrollReset: true });
+  return [quantity, choose];
+}
+
+export const ErrorBoundary = RouteError;

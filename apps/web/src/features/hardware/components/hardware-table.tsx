@@ -1,0 +1,82 @@
+import type { Hardware } from '@hidewright/contract';
+import { Decimal } from 'decimal.js';
+import { useMemo, type ReactNode } from 'react';
+import type { Column } from '../../../components/column.ts';
+import { DataTable } from '../../../components/data-table.tsx';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+
+const counted = (id: string, header: string, value: (row: Hardware) => number): Column<Hardware> => ({
+  id,
+  header,
+  value,
+  cell: (row) => countText(value(row)),
+  align: 'right',
+});
+
+function pricesIn(currency: string): Column<Hardware>[] {
+  return [
+    {
+      id: 'price',
+      header: `Price, ${currency}`,
+      value: (row) => row.unitPrice,
+      cell: (row) => row.unitPrice !== undefined && unitPriceText(row.unitPrice),
+      align: 'right',
+    },
+    {
+      id: 'value',
+      header: `On hand at cost, ${currency}`,
+      value: (row) => row.valueOnHand,
+      cell: (row) => row.valueOnHand !== undefined && moneyText(row.valueOnHand),
+      align: 'right',
+      total: (rows) => moneyText(Decimal.sum(0, ...rows.map((row) => row.valueOnHand ?? '0')).toFixed()),
+    },
+  ];
+}
+
+const basics: Column<Hardware>[] = [
+  {
+    id: 'name',
+    header: 'Name',
+    value: (row) => row.name,
+    cell: (row) => (
+      <span className="inline-flex flex-wrap items-baseline gap-x-3">
+        <TextLink to={`/stockroom/hardware/${row.id}`}>{row.name}</TextLink>
+        {row.short && <StateMark state="short" />}
+      </span>
+    ),
+    onPhone: 'title',
+  },
+  { id: 'kind', header: 'Kind', value: (row) => row.kind, onPhone: 'hidden' },
+  counted('onHand', 'On hand', (row) => row.onHand),
+  counted('reserved', 'Held for jobs', (row) => row.reserved),
+  counted('free', 'Free', (row) => row.free),
+  counted('onOrder', 'On order', (row) => row.onOrder),
+];
+
+interface HardwareTableProps {
+  rows: readonly Hardware[];
+  empty: ReactNode;
+}
+
+export function HardwareTable({ rows, empty }: HardwareTableProps) {
+  const { currency } = useWorkshop();
+  const withPrices = rows.some((row) => row.unitPrice !== undefined);
+  const columns = useMemo(
+    () => (withPrices ? [...basics, ...pricesIn(currency)] : basics),
+    [currency, withPrices],
+  );
+  return (
+    <DataTable
+      label="Hardware and supplies"
+      rows={rows}
+      rowId={(row) => row.id}
+      columns={columns}
+      empty={empty}
+      filterLabel="Filter hardware and supplies"
+      sortedBy={{ id: 'name' }}
+    />
+  );
+}

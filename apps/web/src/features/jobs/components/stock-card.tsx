@@ -1,0 +1,113 @@
+import type { Job, JobHardware, JobLot } from '@hidewright/contract';
+import type { ReactNode } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { Card } from '../../../components/card.tsx';
+import { EmptyState } from '../../../components/empty-state.tsx';
+import { Notice } from '../../../components/notice.tsx';
+import { say } from '../../../components/toast.ts';
+import { ApiProblem } from '../../../lib/api-problem.ts';
+import { areaText, countText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { useTakeForJob } from '../jobs.mutations.ts';
+import { TakeOther } from './take-other.tsx';
+
+interface StockCardProps {
+  job: Job;
+  canTake: boolean;
+}
+
+/** Leather and hardware of a job: what is held for it, what it has taken, and one press to take what is held. */
+export function StockCard({ job, canTake }: StockCardProps) {
+  const { areaUnit } = useWorkshop();
+  const { mutate, isPending, error, variables } = useTakeForJob();
+  const take = (body: Parameters<typeof mutate>[0]['body'], sentence: string) =>
+    mutate({ params: { id: job.id }, body }, { onSuccess: () => say(sentence) });
+  const busyWith = (field: 'lotId' | 'hardwareId', id: number) =>
+    isPending && variables.body[field as never] === id;
+  return (
+    <Card
+      title="Leather and hardware"
+      subtitle={`${areaText(job.neededAreaMm2, areaUnit)} of ${job.leatherName} needed`}
+    >
+      {error && (
+        <Notice tone="danger" live className="mb-4">
+          {error instanceof ApiProblem ? error.detail : 'That did not work. Try again.'}
+        </Notice>
+      )}
+      <ul aria-label="Lots" className="divide-y divide-stitch/60">
+        {job.lots.map((lot) => (
+          <Line key={lot.lotId} title={<LotTitle lot={lot} />} detail={lotLine(lot, (mm2) => areaText(mm2, areaUnit))}>
+            {canTake && lot.heldAreaMm2 !== '0' && (
+              <Button
+                size="bench"
+                className="text-base"
+                busy={busyWith('lotId', lot.lotId)}
+                onClick={() => take({ lotId: lot.lotId, areaMm2: lot.heldAreaMm2 }, `Taken from lot ${lot.tag}.`)}
+              >
+                Take {areaText(lot.heldAreaMm2, areaUnit)}
+              </Button>
+            )}
+          </Line>
+        ))}
+      </ul>
+      {job.lots.length === 0 && (
+        <EmptyState title={`No ${job.leatherName} on the rack.`}>Receive a lot in the Stockroom, then take from it here.</EmptyState>
+      )}
+      {job.hardware.length > 0 && (
+        <ul aria-label="Hardware" className="mt-2 divide-y divide-stitch/60 border-t border-stitch/60">
+          {job.hardware.map((item) => (
+            <Line key={item.hardwareId} title={<strong>{item.name}</strong>} detail={hardwareLine(item)}>
+              {canTake && item.held > 0 && (
+                <Button
+                  size="bench"
+                  className="text-base"
+                  busy={busyWith('hardwareId', item.hardwareId)}
+                  onClick={() => take({ hardwareId: item.hardwareId, quantity: item.held }, `Taken: ${item.held} ${item.name}.`)}
+                >
+                  Take {countText(item.held)}
+                </Button>
+              )}
+            </Line>
+          ))}
+        </ul>
+      )}
+      {canTake && <TakeOther job={job} />}
+    </Card>
+  );
+}
+
+function Line({ title, detail, children }: { title: ReactNode; detail: string; children?: ReactNode }) {
+  return (
+    <li className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2 py-2.5">
+      <div>
+        <div>{title}</div>
+        <div className="text-sm text-ink-soft">{detail}</div>
+      </div>
+      {children}
+    </li>
+  );
+}
+
+function LotTitle({ lot }: { lot: JobLot }) {
+  const rest = [lot.form, lot.shade, lot.place].filter((word) => word !== '').join(', ');
+  return (
+    <>
+      <strong>{lot.tag}</strong> <span className="text-ink-soft">{rest}</span>
+    </>
+  );
+}
+
+function lotLine(lot: JobLot, say: (areaMm2: string) => string): string {
+  const parts = [];
+  if (lot.heldAreaMm2 !== '0') parts.push(`${say(lot.heldAreaMm2)} held`);
+  if (lot.takenAreaMm2 !== '0') parts.push(`${say(lot.takenAreaMm2)} taken`);
+  parts.push(lot.freeAreaMm2 === '0' ? 'nothing free' : `${say(lot.freeAreaMm2)} free`);
+  return parts.join(' · ');
+}
+
+function hardwareLine({ needed, held, taken, free }: JobHardware): string {
+  const parts = [`${countText(needed)} needed`];
+  if (held > 0) parts.push(`${countText(held)} held`);
+  if (taken > 0) parts.push(`${countText(taken)} taken`);
+  return [...parts, `${countText(free)} free`].join(' · ');
+}

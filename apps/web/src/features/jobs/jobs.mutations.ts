@@ -1,0 +1,7 @@
+import { finishJob, pauseJob, resumeJob, takeForJob } from '@hidewright/contract';
+import { useSend } from '../../lib/use-send.ts';
+
+export const useTakeForJob = () => useSend(takeForJob);
+export const useFinishJob = () => useSend(finishJob);
+export const usePauseJob = () => useSend(pauseJob);
+export const useResumeJob = () => useSend(resumeJob);

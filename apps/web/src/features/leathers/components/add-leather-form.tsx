@@ -1,0 +1,36 @@
+import { addLeather, type Leather } from '@hidewright/contract';
+import { Form } from '../../../components/form.tsx';
+import type { Choice } from '../../../components/select-field.tsx';
+import { useAddLeather } from '../leathers.mutations.ts';
+import { LeatherFields } from './leather-fields.tsx';
+
+const blank = {
+  name: '',
+  pricePerFt2: '',
+  weightLowOz: null,
+  weightHighOz: null,
+  tannage: '',
+  colour: '',
+  finish: '',
+  supplierId: null,
+};
+
+interface AddLeatherFormProps {
+  suppliers: readonly Choice[];
+  onAdded: (leather: Leather) => void;
+}
+
+export function AddLeatherForm({ suppliers, onAdded }: AddLeatherFormProps) {
+  const send = useAddLeather();
+  return (
+    <Form
+      schema={addLeather.body}
+      defaults={blank}
+      submitWord="Add the leather"
+      draftKey="leather-new"
+      onSend={async (body) => onAdded(await send.mutateAsync({ body }))}
+    >
+      <LeatherFields suppliers={suppliers} />
+    </Form>
+  );
+}

@@ -1,0 +1,13 @@
+import { describe, expect, it } from 'vitest';
+import { weightText } from './leather-words.ts';
+
+describe('the weight of a leather', () => {
+  it.each([
+    ['5', '6', '5–6 oz'],
+    ['5.500', null, '5.5 oz'],
+    ['8', '8', '8 oz'],
+    [null, null, ''],
+  ])('%s to %s reads “%s”', (weightLowOz, weightHighOz, text) => {
+    expect(weightText({ weightLowOz, weightHighOz })).toBe(text);
+  });
+});

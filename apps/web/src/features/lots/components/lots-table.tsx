@@ -1,0 +1,92 @@
+import type { Lot } from '@hidewright/contract';
+import { Decimal } from 'decimal.js';
+import { useMemo, type ReactNode } from 'react';
+import type { Column } from '../../../components/column.ts';
+import { DataTable } from '../../../components/data-table.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { areaText, dayText, moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
+import { formText } from '../lot-words.ts';
+
+const sumOf = (values: readonly string[]) => Decimal.sum(0, ...values).toFixed();
+
+function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
+  const { areaUnit, lengthUnit, currency, today } = workshop;
+  const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
+  const value: Column<Lot> = {
+    id: 'value',
+    header: `Left at cost, ${currency}`,
+    value: (row) => row.valueOnHand,
+    cell: (row) => row.valueOnHand !== undefined && moneyText(row.valueOnHand),
+    align: 'right',
+    total: (rows) => moneyText(sumOf(rows.map((row) => row.valueOnHand ?? '0'))),
+  };
+  return [
+    {
+      id: 'tag',
+      header: 'Tag',
+      value: (row) => row.tag,
+      cell: (row) => <TextLink to={`/stockroom/lots/${row.id}`}>{row.tag}</TextLink>,
+      onPhone: 'title',
+    },
+    { id: 'leather', header: 'Leather', value: (row) => row.leatherName },
+    { id: 'form', header: 'Form', value: (row) => formText(row, lengthUnit) },
+    { id: 'place', header: 'Place', value: (row) => row.place },
+    {
+      id: 'measured',
+      header: 'Measured',
+      value: (row) => row.measuredAreaMm2,
+      cell: (row) => area(row.measuredAreaMm2),
+      align: 'right',
+      onPhone: 'hidden',
+    },
+    {
+      id: 'onHand',
+      header: 'On hand',
+      value: (row) => row.onHandAreaMm2,
+      cell: (row) => area(row.onHandAreaMm2),
+      align: 'right',
+      total: (rows) => area(sumOf(rows.map((row) => row.onHandAreaMm2))),
+    },
+    {
+      id: 'free',
+      header: 'Free',
+      value: (row) => row.freeAreaMm2,
+      cell: (row) => area(row.freeAreaMm2),
+      align: 'right',
+      total: (rows) => area(sumOf(rows.map((row) => row.freeAreaMm2))),
+    },
+    ...(withValues ? [value] : []),
+    {
+      id: 'received',
+      header: 'Received',
+      value: (row) => row.receivedOn,
+      cell: (row) => dayText(row.receivedOn, today),
+      onPhone: 'hidden',
+    },
+  ];
+}
+
+interface LotsTableProps {
+  rows: readonly Lot[];
+  empty: ReactNode;
+  /** Under the last row, such as a button for more. */
+  after?: ReactNode;
+}
+
+export function LotsTable({ rows, empty, after }: LotsTableProps) {
+  const workshop = useWorkshop();
+  const withValues = rows.some((row) => row.valueOnHand !== undefined);
+  const columns = useMemo(() => columnsFor(workshop, withValues), [workshop, withValues]);
+  return (
+    <DataTable
+      label="Lots"
+      rows={rows}
+      rowId={(row) => row.id}
+      columns={columns}
+      empty={empty}
+      filterLabel="Filter lots"
+      after={after}
+    />
+  );
+}

@@ -1,0 +1,11 @@
+import { describe, expect, it } from 'vitest';
+import { formText } from './lot-words.ts';
+
+describe('the form of a lot', () => {
+  it('is a word, or how many of what size', () => {
+    expect(formText({ form: 'side', pieces: 1, widthMm: null, heightMm: null }, 'in')).toBe('side');
+    const bundle = { form: 'panel', pieces: 12, widthMm: '279.4', heightMm: '330.2' } as const;
+    expect(formText(bundle, 'in')).toBe('12 panels, 11 × 13 in');
+    expect(formText({ ...bundle, form: 'belly', heightMm: null }, 'in')).toBe('12 bellies');
+  });
+});

@@ -1,0 +1,26 @@
+import { listLots, readLot } from '@hidewright/contract';
+import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
+import { call } from '../../lib/api.ts';
+
+interface Wanted {
+  leatherId?: number | undefined;
+  onRack?: 'yes' | undefined;
+}
+
+/** Lots, newest first, page by page. */
+export function lotsQuery(wanted: Wanted = {}) {
+  return infiniteQueryOptions({
+    queryKey: ['lots', 'list', wanted],
+    queryFn: ({ signal, pageParam }) =>
+      call(listLots, { query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) }, signal }),
+    initialPageParam: '',
+    getNextPageParam: (last) => last.next,
+  });
+}
+
+export function lotQuery(id: number) {
+  return queryOptions({
+    queryKey: ['lots', id],
+    queryFn: ({ signal }) => call(readLot, { params: { id }, signal }),
+  });
+}

@@ -1,0 +1,86 @@
+import type { RunCheck } from '@hidewright/contract';
+import { useQuery } from '@tanstack/react-query';
+import { useId, useState, type ReactNode } from 'react';
+import { Card } from '../../../components/card.tsx';
+import { Skeleton } from '../../../components/loading.tsx';
+import { Notice } from '../../../components/notice.tsx';
+import { ApiProblem } from '../../../lib/api-problem.ts';
+import { countText, dayText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { checkQuery } from '../orders.queries.ts';
+import { CheckAnswers } from './check-answers.tsx';
+
+interface CanWeMakeItProps {
+  quoteId: number;
+  /** Where it begins; the day can be changed. */
+  quantity?: number;
+  by?: string | undefined;
+  /** What follows from the answer, such as taking the order on. */
+  children?: (check: RunCheck) => ReactNode;
+}
+
+/** Can we make it? Yes, or exactly what is short: leather, hardware, tooling, bench hours, by that day. */
+export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProps) {
+  const { today } = useWorkshop();
+  const id = useId();
+  const [chosen, setChosen] = useState(by);
+  const { data: check, error, isFetching } = useQuery(checkQuery(quoteId, { quantity, by: chosen }));
+  return (
+    <Card title="Can we make it?">
+      <div className="mb-4 flex flex-wrap items-end gap-x-4 gap-y-2">
+        <div>
+          <label htmlFor={id} className="mb-1 block font-semibold">
+            Packed by
+          </label>
+          <input
+            id={id}
+            type="date"
+            min={today}
+            value={chosen ?? check?.by ?? ''}
+            onChange={(event) => setChosen(event.target.value === '' ? undefined : event.target.value)}
+            className="min-h-10 rounded border border-edge bg-card px-3 py-1.5"
+          />
+        </div>
+        {check && (
+          <p className="pb-2 text-ink-soft">
+            {countText(check.quantity)} needed, {countText(check.cutCount)} to cut
+          </p>
+        )}
+      </div>
+      {error && (
+        <Notice tone="danger" live>
+          {error instanceof ApiProblem ? error.detail : 'That did not work. Try again.'}
+        </Notice>
+      )}
+      {!check && !error && <Skeleton className="h-32 w-full" />}
+      {check && !error && (
+        <div aria-busy={isFetching}>
+          <Verdict check={check} />
+          <CheckAnswers check={check} />
+          {children?.(check)}
+        </div>
+      )}
+    </Card>
+  );
+}
+
+const words = { leather: 'leather', hardware: 'hardware', tooling: 'tooling', hours: 'bench hours' };
+
+function Verdict({ check }: { check: RunCheck }) {
+  const { today } = useWorkshop();
+  const by = dayText(check.by, today);
+  if (check.yes) {
+    return (
+      <Notice tone="ok" live title={`Yes, by ${by}.`}>
+        Nothing is held until it is taken on.
+      </Notice>
+    );
+  }
+  const short = [...new Set(check.answers.filter(({ enough }) => !enough).map(({ about }) => words[about]))];
+  return (
+    <Notice tone="danger" live title={`Not by ${by}:`}>
+      {short.join(' and ')} {short.length === 1 && short[0] !== 'bench hours' ? 'is' : 'are'} short.
+      {check.earliestDay !== null && check.earliestDay > check.by && ` The bench has the hours by ${dayText(check.earliestDay, today)}.`}
+    </Notice>
+  );
+}

@@ -1,0 +1,68 @@
+import { useQuery } from '@tanstack/react-query';
+import { Plus } from 'lucide-react';
+import { useState } from 'react';
+import { useFieldArray } from 'react-hook-form';
+import { Button } from '../../../components/button.tsx';
+import { NumberField } from '../../../components/number-field.tsx';
+import { SelectField } from '../../../components/select-field.tsx';
+import { unitPriceText } from '../../../lib/formatting.ts';
+import { hardwareChoicesQuery } from '../patterns.queries.ts';
+import { AddHardwareDialog } from './add-hardware-dialog.tsx';
+import { RemoveButton } from './remove-button.tsx';
+
+const name = 'definition.hardware';
+
+/** What goes on each piece: rivets, snaps, a box. */
+export function HardwareFields() {
+  const { fields, append, remove } = useFieldArray({ name });
+  const { data: hardware = [] } = useQuery(hardwareChoicesQuery());
+  const [adding, setAdding] = useState(false);
+  const choices = hardware.map(({ id, name: label, unitPrice }) => ({
+    value: id,
+    label: unitPrice === undefined ? label : `${label}, ${unitPriceText(unitPrice)}`,
+  }));
+  return (
+    <fieldset>
+      <legend className="mb-1 text-lg font-semibold">Hardware and supplies</legend>
+      <p className="mb-3 text-sm text-ink-soft">What goes on each piece; leave it empty where there is none.</p>
+      <div className="space-y-3">
+        {fields.map((field, at) => (
+          <div key={field.id} className="flex flex-wrap items-start gap-x-4 gap-y-2">
+            <div className="min-w-56 grow basis-56">
+              <SelectField
+                key={choices.length}
+                name={`${name}.${at}.hardwareId`}
+                label="Hardware"
+                placeholder="Choose one"
+                whenEmpty="text"
+                choices={choices}
+              />
+            </div>
+            <NumberField name={`${name}.${at}.perPiece`} label="For each piece" whenEmpty="text" />
+            <RemoveButton label={`Remove hardware ${at + 1}`} onRemove={() => remove(at)} />
+          </div>
+        ))}
+      </div>
+      <div className="mt-2 -ml-3 flex flex-wrap">
+        {choices.length > 0 && (
+          <Button
+            tone="quiet"
+            onClick={() =>
+              append({ hardwareId: '', perPiece: 1 }, { focusName: `${name}.${fields.length}.hardwareId` })
+            }
+          >
+            <Plus size={18} aria-hidden="true" /> Hardware from the list
+          </Button>
+        )}
+        <Button tone="quiet" onClick={() => setAdding(true)}>
+          <Plus size={18} aria-hidden="true" /> New hardware
+        </Button>
+      </div>
+      <AddHardwareDialog
+        open={adding}
+        onOpenChange={setAdding}
+        onAdded={({ id }) => append({ hardwareId: id, perPiece: 1 }, { shouldFocus: false })}
+      />
+    </fieldset>
+  );
+}

@@ -1,0 +1,44 @@
+import { useQuery } from '@tanstack/react-query';
+import { Plus } from 'lucide-react';
+import { useState } from 'react';
+import { useFormContext, useWatch } from 'react-hook-form';
+import { Button } from '../../../components/button.tsx';
+import { SelectField } from '../../../components/select-field.tsx';
+import { unitPriceText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { leatherChoicesQuery } from '../patterns.queries.ts';
+import { AddLeatherDialog } from './add-leather-dialog.tsx';
+
+const name = 'definition.leatherId';
+
+/** The leather it is made of: chosen, or added in place. */
+export function LeatherField() {
+  const { setValue } = useFormContext();
+  const { currency } = useWorkshop();
+  const { data: leathers = [] } = useQuery(leatherChoicesQuery());
+  const [adding, setAdding] = useState(false);
+  const leather = leathers.find(({ id }) => id === Number(useWatch({ name })));
+  const price = leather?.pricePerFt2 === undefined ? '' : `${unitPriceText(leather.pricePerFt2)} ${currency} per ft²`;
+  return (
+    <div>
+      {/* A new list is a new field: a chosen leather must stand among its choices before it can be shown. */}
+      <SelectField
+        key={leathers.map(({ id }) => id).join()}
+        name={name}
+        label="Leather"
+        help={leathers.length === 0 ? 'None is there yet: add the first one.' : price}
+        placeholder="Choose a leather"
+        whenEmpty="text"
+        choices={leathers.map(({ id, name: label }) => ({ value: id, label }))}
+      />
+      <Button tone="quiet" className="mt-1 -ml-3" onClick={() => setAdding(true)}>
+        <Plus size={18} aria-hidden="true" /> Another leather
+      </Button>
+      <AddLeatherDialog
+        open={adding}
+        onOpenChange={setAdding}
+        onAdded={({ id }) => setValue(name, id, { shouldDirty: true, shouldValidate: false })}
+      />
+    </div>
+  );
+}

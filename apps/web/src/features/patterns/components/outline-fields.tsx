@@ -1,0 +1,46 @@
+import { useWatch } from 'react-hook-form';
+import { LengthField } from '../../../components/length-field.tsx';
+import { RadioCards } from '../../../components/radio-cards.tsx';
+
+const shapes = [
+  { value: 'round', label: 'Round' },
+  { value: 'rectangle', label: 'Rectangle', detail: 'with corner radius' },
+  { value: 'oval', label: 'Oval' },
+  { value: 'tag', label: 'Tag', detail: 'with a neck' },
+];
+
+const cornerRadius = { name: 'cornerRadiusMm', label: 'Corner radius', help: '0 for sharp corners' };
+const measures: Record<string, readonly { name: string; label: string; help?: string }[]> = {
+  round: [{ name: 'diameterMm', label: 'Diameter' }],
+  rectangle: [
+    { name: 'widthMm', label: 'Width' },
+    { name: 'heightMm', label: 'Height' },
+    cornerRadius,
+  ],
+  oval: [
+    { name: 'widthMm', label: 'Width' },
+    { name: 'heightMm', label: 'Height' },
+  ],
+  tag: [
+    { name: 'lengthMm', label: 'Length', help: 'over all, neck included' },
+    { name: 'widthMm', label: 'Width' },
+    { name: 'neckLengthMm', label: 'Neck length' },
+    { name: 'neckWidthMm', label: 'Neck width' },
+    cornerRadius,
+  ],
+};
+
+/** The closed curve that the cutting die cuts. */
+export function OutlineFields() {
+  const shape = String(useWatch({ name: 'definition.outline.shape' }));
+  return (
+    <>
+      <RadioCards name="definition.outline.shape" label="Outline" cards={shapes} across />
+      <div className="flex flex-wrap gap-x-5 gap-y-4">
+        {(measures[shape] ?? []).map(({ name, ...labels }) => (
+          <LengthField key={`${shape} ${name}`} name={`definition.outline.${name}`} whenEmpty="text" {...labels} />
+        ))}
+      </div>
+    </>
+  );
+}

@@ -1,0 +1,10 @@
+import { addHardware, addLeather, addPattern, changePattern } from '@hidewright/contract';
+import { useSend } from '../../lib/use-send.ts';
+
+export const useAddPattern = () => useSend(addPattern);
+
+export const useChangePattern = () => useSend(changePattern);
+
+export const useAddLeather = () => useSend(addLeather);
+
+export const useAddHardware = () => useSend(addHardware);

@@ -1,0 +1,58 @@
+import {
+  listHardware,
+  listLeathers,
+  listPatterns,
+  listPatternVersions,
+  readPattern,
+  readWorkshop,
+} from '@hidewright/contract';
+import { queryOptions } from '@tanstack/react-query';
+import { call } from '../../lib/api.ts';
+
+/** The patterns, newest first; one page holds what a small shop makes. */
+export function patternsQuery() {
+  return queryOptions({
+    queryKey: ['patterns'],
+    queryFn: ({ signal }) => call(listPatterns, { query: { limit: 200 }, signal }),
+  });
+}
+
+export function patternQuery(id: number) {
+  return queryOptions({
+    queryKey: ['patterns', id],
+    queryFn: ({ signal }) => call(readPattern, { params: { id }, signal }),
+  });
+}
+
+export function patternVersionsQuery(id: number) {
+  return queryOptions({
+    queryKey: ['patterns', id, 'versions'],
+    queryFn: ({ signal }) => call(listPatternVersions, { params: { id }, signal }),
+  });
+}
+
+/** The leathers that a pattern can be made of. */
+export function leatherChoicesQuery() {
+  return queryOptions({
+    queryKey: ['patterns', 'leather-choices'],
+    queryFn: ({ signal }) => call(listLeathers, { query: { limit: 200 }, signal }),
+    select: ({ items }) => items.filter((leather) => leather.active),
+  });
+}
+
+/** The hardware and supplies that a pattern can take. */
+export function hardwareChoicesQuery() {
+  return queryOptions({
+    queryKey: ['patterns', 'hardware-choices'],
+    queryFn: ({ signal }) => call(listHardware, { query: { limit: 200 }, signal }),
+    select: ({ items }) => items.filter((hardware) => hardware.active),
+  });
+}
+
+/** The shop's spacing, trim and rejects, with which a new pattern begins. */
+export function startingValuesQuery() {
+  return queryOptions({
+    queryKey: ['patterns', 'starting-values'],
+    queryFn: ({ signal }) => call(readWorkshop, { signal }),
+  });
+}

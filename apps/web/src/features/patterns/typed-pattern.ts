@@ -1,0 +1,114 @@
+import { addPattern, type Pattern, type PatternDefinition, type Workshop } from '@hidewright/contract';
+import { z } from 'zod';
+
+/** What a form holds: every measure of every shape, so that going from one to another and back loses nothing. */
+type Typed = Record<string, unknown>;
+
+const outlineMeasures: Record<string, readonly string[]> = {
+  round: ['diameterMm'],
+  rectangle: ['widthMm', 'heightMm', 'cornerRadiusMm'],
+  oval: ['widthMm', 'heightMm'],
+  tag: ['lengthMm', 'widthMm', 'neckLengthMm', 'neckWidthMm', 'cornerRadiusMm'],
+};
+const containerMeasures: Record<string, readonly string[]> = {
+  panel: ['widthMm', 'heightMm'],
+  strip: ['widthMm', 'lengthMm'],
+};
+const workMeasures: Record<string, readonly string[]> = {
+  minutesPer100: ['minutes', 'rejectPercent'],
+  steps: ['steps'],
+};
+
+/** A step as it is before anything is typed. */
+export const blankStep = { name: '', per: 'piece', setupMinutes: '0', secondsPerUnit: '', rejectPercent: '0' };
+
+const blankDefinition = {
+  layoutBy: 'outline',
+  alsoDrawn: false,
+  outline: {
+    shape: 'round',
+    diameterMm: '',
+    widthMm: '',
+    heightMm: '',
+    cornerRadiusMm: '0',
+    lengthMm: '',
+    neckLengthMm: '',
+    neckWidthMm: '',
+  },
+  handCount: { pieces: '', widthMm: '', heightMm: '' },
+  container: { form: 'panel', widthMm: '', heightMm: '', lengthMm: '' },
+  spacingMm: '',
+  trimMm: '',
+  leatherId: '',
+  hardware: [],
+  work: { kind: 'minutesPer100', minutes: '', rejectPercent: '', steps: [blankStep] },
+  needsDie: true,
+  needsPlate: false,
+};
+
+/** A new pattern, with the shop's own starting values. */
+export function blankPattern({ spacingMm, trimMm, rejectPercent }: Workshop): Typed {
+  const work = { ...blankDefinition.work, rejectPercent };
+  return { name: '', definition: { ...blankDefinition, spacingMm, trimMm, work } };
+}
+
+/** A pattern as the form takes it up again. */
+export function typedPattern({ name, definition }: Pick<Pattern, 'name' | 'definition'>): Typed {
+  const blank = blankDefinition;
+  return {
+    name,
+    definition: {
+      ...definition,
+      alsoDrawn: definition.layoutBy === 'hand count' && definition.outline !== null,
+      outline: { ...blank.outline, ...definition.outline },
+      handCount: { ...blank.handCount, ...definition.handCount },
+      container: { ...blank.container, ...definition.container },
+      work: { ...blank.work, rejectPercent: '0', ...definition.work },
+    },
+  };
+}
+
+/** What the contract is sent: of all that the form holds, what the chosen shape, panel and way of working need. */
+export function patternBody(typed: unknown): { name: unknown; definition: Typed } {
+  const { name, definition } = typed as { name: unknown; definition: Typed };
+  return { name, definition: { ...definitionBody(definition) } };
+}
+
+/** The part of the body that says how the pieces lie. */
+export function layoutBody(definition: Typed): Typed {
+  const byHand = definition['layoutBy'] === 'hand count';
+  const drawn = !byHand || definition['alsoDrawn'] === true;
+  return {
+    layoutBy: definition['layoutBy'],
+    outline: drawn ? chosen(definition['outline'], 'shape', outlineMeasures) : null,
+    handCount: byHand ? definition['handCount'] : null,
+    container: byHand ? null : chosen(definition['container'], 'form', containerMeasures),
+    spacingMm: definition['spacingMm'],
+    trimMm: definition['trimMm'],
+  };
+}
+
+function definitionBody(definition: Typed): Typed {
+  return {
+    ...layoutBody(definition),
+    leatherId: definition['leatherId'],
+    hardware: definition['hardware'],
+    work: chosen(definition['work'], 'kind', workMeasures),
+    needsDie: definition['needsDie'],
+    needsPlate: definition['needsPlate'],
+  };
+}
+
+function chosen(value: unknown, by: string, measures: Record<string, readonly string[]>): Typed {
+  const typed = (value ?? {}) as Typed;
+  const names = measures[String(typed[by])] ?? [];
+  return Object.fromEntries([by, ...names].map((name) => [name, typed[name]]));
+}
+
+/** The contract's own schema, asked of what the form would send: its sentences land beside the same fields. */
+export const patternForm = z.preprocess(patternBody, addPattern.body as z.ZodType) as unknown as z.ZodType<Typed, Typed>;
+
+/** What is sent, after the form's schema has found nothing to say. */
+export function sentPattern(typed: unknown): { name: string; definition: PatternDefinition } {
+  return patternBody(typed) as unknown as { name: string; definition: PatternDefinition };
+}

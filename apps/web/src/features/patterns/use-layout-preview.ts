@@ -1,0 +1,34 @@
+import type { LayoutSource } from '@hidewright/contract';
+import { useEffect, useState } from 'react';
+import type { LaidOut } from './laid-out.ts';
+
+interface Preview {
+  /** Of the last input that could be laid out; what is typed now may not be answered yet. */
+  answer: LaidOut | undefined;
+  working: boolean;
+}
+
+const pauseMs = 150;
+
+/** Works the layout out while it is typed; a new input drops the old question. */
+export function useLayoutPreview(source: LayoutSource | undefined): Preview {
+  const [answered, setAnswered] = useState<{ key: string; answer: LaidOut }>();
+  const key = source === undefined ? '' : JSON.stringify(source);
+
+  useEffect(() => {
+    if (key === '') return undefined;
+    let worker: Worker | undefined;
+    const start = setTimeout(() => {
+      worker = new Worker(new URL('./layout-worker.ts', import.meta.url), { type: 'module' });
+      worker.addEventListener('message', ({ data }: MessageEvent<LaidOut>) => setAnswered({ key, answer: data }));
+      worker.postMessage(JSON.parse(key));
+    }, pauseMs);
+    return () => {
+      clearTimeout(start);
+      worker?.terminate();
+    };
+  }, [key]);
+
+  if (key === '') return { answer: undefined, working: false };
+  return { answer: answered?.answer, working: answered?.key !== key };
+}

@@ -1,0 +1,35 @@
+import type { RunBasis } from '@hidewright/contract';
+import { DecimalField } from '../../../components/decimal-field.tsx';
+import { MoneyField } from '../../../components/money-field.tsx';
+import { percentText, unitPriceText } from '../../../lib/formatting.ts';
+
+/** Values that are worked out or looked up, and can be set by hand for this quote alone. */
+export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
+  if (!basis) return null;
+  const { work, leather } = basis.input;
+  return (
+    <details>
+      <summary className="rounded py-1 font-semibold">Set by hand, for this quote alone</summary>
+      <div className="mt-3 space-y-4">
+        <MoneyField
+          name="overrides.leatherPricePerFt2"
+          label="Leather price"
+          per="ft²"
+          optional
+          help={`${leather.name} is ${unitPriceText(leather.pricePerFt2)} per ft².`}
+        />
+        {work.kind === 'minutesPer100' ? (
+          <DecimalField
+            name="overrides.rejectPercent"
+            label="Rejects"
+            unit="%"
+            optional
+            help={`The pattern says ${percentText(work.rejectPercent)}.`}
+          />
+        ) : (
+          <p className="text-sm text-ink-soft">This pattern has its rejects at each step; change them there.</p>
+        )}
+      </div>
+    </details>
+  );
+}

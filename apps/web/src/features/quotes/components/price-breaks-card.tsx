@@ -1,0 +1,89 @@
+import type { RunNumbers } from '@hidewright/domain';
+import { Card } from '../../../components/card.tsx';
+import { KeyFigures } from '../../../components/key-figures.tsx';
+import { Notice } from '../../../components/notice.tsx';
+import { PriceLadder } from '../../../components/price-ladder.tsx';
+import { countText, hoursText, moneyText, percentText, unitPriceText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+
+interface PriceBreaksCardProps {
+  numbers: RunNumbers;
+  target: string;
+  chosen: number;
+  onChoose: (quantity: number) => void;
+}
+
+/** The ladder, what to be careful of, and the chosen rung in figures. */
+export function PriceBreaksCard({ numbers, target, chosen, onChoose }: PriceBreaksCardProps) {
+  const { currency } = useWorkshop();
+  const rungs = numbers.breaks.map((rung) => ({ ...rung, unitPrice: rung.priceEach }));
+  return (
+    <Card title="Price breaks" subtitle={`what is left per hour, in ${currency}`}>
+      <PriceLadder rungs={rungs} target={target} currency={currency} chosen={chosen} onChoose={onChoose} />
+      <p className="mt-2 text-sm text-ink-soft">
+        Bench: left after everything bought, by bench hours. All in, the mark on the rung: after wages too, by all
+        hours, desk time included.
+      </p>
+      <TypedPrices numbers={numbers} />
+      <Warnings numbers={numbers} chosen={chosen} />
+      <ChosenRung numbers={numbers} chosen={chosen} />
+    </Card>
+  );
+}
+
+/** Where the owner set the price, with what would have been worked out. */
+function TypedPrices({ numbers }: Pick<PriceBreaksCardProps, 'numbers'>) {
+  const typed = numbers.breaks.filter((rung) => rung.typed);
+  if (typed.length === 0) return null;
+  return (
+    <p className="mt-2 text-sm text-ink-soft">
+      {`Your own price at ${typed
+        .map((rung) => `${countText(rung.quantity)} (worked out: ${unitPriceText(rung.suggestedPrice)})`)
+        .join(', ')}.`}
+    </p>
+  );
+}
+
+function Warnings({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 'chosen'>) {
+  const losing = numbers.breaks.some((rung) => rung.loses);
+  const sentences = [...numbers.warnings, ...numbers.breaks.flatMap((rung) => rung.warnings)];
+  const steps = numbers.breaks.find((rung) => rung.quantity === chosen);
+  const next = numbers.breaks.find((rung) => rung.quantity > chosen);
+  if (steps && next && steps.cheaperFrom !== null && steps.cheaperFrom > steps.quantity) {
+    sentences.push(
+      `From ${countText(steps.cheaperFrom)} pieces at ${unitPriceText(steps.priceEach)} on, ${countText(next.quantity)} at ${unitPriceText(next.priceEach)} cost less.`,
+    );
+  }
+  if (sentences.length === 0) return null;
+  return (
+    <Notice tone={losing ? 'danger' : 'attention'} className="mt-3">
+      <ul className="inline-block space-y-1 align-top">
+        {sentences.map((sentence) => (
+          <li key={sentence}>{sentence}</li>
+        ))}
+      </ul>
+    </Notice>
+  );
+}
+
+function ChosenRung({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 'chosen'>) {
+  const rung = numbers.breaks.find((each) => each.quantity === chosen);
+  if (!rung) return null;
+  const tooled = Number(rung.toolingCharge) > 0;
+  return (
+    <div className="mt-4">
+      <KeyFigures
+        figures={[
+          {
+            word: `${countText(rung.quantity)} come to`,
+            figure: moneyText(rung.total),
+            note: tooled ? `tooling ${moneyText(rung.toolingCharge)} of it` : undefined,
+          },
+          { word: 'margin', figure: percentText(rung.marginPercent), note: 'after wages and desk time' },
+          { word: 'left', figure: moneyText(rung.left), note: 'after everything bought' },
+          { word: 'bench time', figure: hoursText(rung.benchMinutes), note: `all hours ${hoursText(rung.allMinutes)}` },
+        ]}
+      />
+    </div>
+  );
+}

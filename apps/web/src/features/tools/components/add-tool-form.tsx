@@ -1,0 +1,52 @@
+import { addTool, type ToolReply } from '@hidewright/contract';
+import { useWatch } from 'react-hook-form';
+import { Form } from '../../../components/form.tsx';
+import { RadioCards } from '../../../components/radio-cards.tsx';
+import { useAddTool } from '../tools.mutations.ts';
+import { ToolFields } from './tool-fields.tsx';
+
+const kinds = [
+  { value: 'cutting die', label: 'Cutting die', detail: 'cuts the outline' },
+  { value: 'stamp plate', label: 'Stamp plate', detail: 'marks the artwork' },
+];
+
+interface AddToolFormProps {
+  /** For which pattern, where it is known already. */
+  patternId: number | null;
+  onAdded: (tool: ToolReply) => void;
+}
+
+export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
+  const send = useAddTool();
+  return (
+    <Form
+      schema={addTool.body}
+      defaults={{
+        kind: 'cutting die',
+        name: '',
+        number: '',
+        metal: '',
+        cost: '',
+        slot: '',
+        patternId,
+        customerId: null,
+        state: 'on the rack',
+      }}
+      submitWord="Add the tool"
+      draftKey="tool-new"
+      onSend={async (body) => onAdded(await send.mutateAsync({ body: ofItsKind(body) }))}
+    >
+      <RadioCards name="kind" label="Kind" cards={kinds} across />
+      <FieldsOfKind />
+    </Form>
+  );
+}
+
+function FieldsOfKind() {
+  return <ToolFields kind={useWatch({ name: 'kind' }) as ToolReply['kind']} isNew />;
+}
+
+/** What was chosen for a plate before it became a die is not sent. */
+function ofItsKind<Body extends { kind: ToolReply['kind'] }>(body: Body): Body {
+  return body.kind === 'cutting die' ? { ...body, metal: '', customerId: null } : body;
+}

@@ -1,0 +1,41 @@
+import { changeTool, readTool, type ToolReply } from '@hidewright/contract';
+import { useQueryClient } from '@tanstack/react-query';
+import { Form } from '../../../components/form.tsx';
+import { say } from '../../../components/toast.ts';
+import { call } from '../../../lib/api.ts';
+import { useChangeTool } from '../tools.mutations.ts';
+import { toolQuery } from '../tools.queries.ts';
+import { toolTitle } from '../tool-words.ts';
+import { ToolFields } from './tool-fields.tsx';
+
+export function ChangeToolForm({ tool }: { tool: ToolReply }) {
+  const send = useChangeTool();
+  const client = useQueryClient();
+  const { queryKey } = toolQuery(tool.id);
+
+  async function reload() {
+    const now = await call(readTool, { params: { id: tool.id } });
+    client.setQueryData(queryKey, now);
+    return typedOf(now);
+  }
+
+  return (
+    <Form
+      schema={changeTool.body}
+      defaults={typedOf(tool)}
+      submitWord="Save"
+      draftKey={`tool-${tool.id}`}
+      onReload={reload}
+      onSend={async (body) => {
+        const ifMatch = client.getQueryData<ToolReply>(queryKey)?.version ?? tool.version;
+        say(`${toolTitle(await send.mutateAsync({ params: { id: tool.id }, body, ifMatch }))} is saved.`);
+      }}
+    >
+      <ToolFields kind={tool.kind} />
+    </Form>
+  );
+}
+
+function typedOf({ name, number, metal, cost, lifeUses, slot, patternId, customerId, state }: ToolReply) {
+  return { name, number, metal, cost, lifeUses, slot, patternId, customerId, state };
+}

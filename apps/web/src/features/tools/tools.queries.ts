@@ -1,0 +1,47 @@
+import { listCustomers, listImpressions, listPatterns, listTools, readTool } from '@hidewright/contract';
+import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
+import { call } from '../../lib/api.ts';
+
+/** Cutting dies and stamp plates, of one pattern or all of them; one page holds what a small shop's rack does. */
+export function toolsQuery(patternId?: number) {
+  return queryOptions({
+    queryKey: ['tools', 'list', patternId ?? 'all'],
+    queryFn: ({ signal }) => call(listTools, { query: { limit: 200, patternId }, signal }),
+  });
+}
+
+export function toolQuery(id: number) {
+  return queryOptions({
+    queryKey: ['tools', id],
+    queryFn: ({ signal }) => call(readTool, { params: { id }, signal }),
+  });
+}
+
+/** What a tool did, newest first, page by page. */
+export function impressionsQuery(id: number) {
+  return infiniteQueryOptions({
+    queryKey: ['tools', id, 'impressions'],
+    queryFn: ({ signal, pageParam }) =>
+      call(listImpressions, { params: { id }, query: { limit: 50, ...(pageParam && { cursor: pageParam }) }, signal }),
+    initialPageParam: '',
+    getNextPageParam: (last) => last.next,
+  });
+}
+
+/** The patterns that a tool can be for. */
+export function patternChoicesQuery() {
+  return queryOptions({
+    queryKey: ['tools', 'pattern-choices'],
+    queryFn: ({ signal }) => call(listPatterns, { query: { limit: 200 }, signal }),
+    select: ({ items }) => items.map(({ id, name }) => ({ value: id, label: name })),
+  });
+}
+
+/** The customers whose artwork a plate can carry. */
+export function customerChoicesQuery() {
+  return queryOptions({
+    queryKey: ['tools', 'customer-choices'],
+    queryFn: ({ signal }) => call(listCustomers, { query: { limit: 200 }, signal }),
+    select: ({ items }) => items.map(({ id, name }) => ({ value: id, label: name })),
+  });
+}

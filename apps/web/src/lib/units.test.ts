@@ -1,0 +1,42 @@
+import { describe, expect, it } from 'vitest';
+import { areaFigure, lengthFigure, readArea, readLength, readMixedNumber } from './units.ts';
+
+describe('what a person types for a measure', () => {
+  it.each([
+    ['24.75', '24.75'],
+    ['24,75', '24.75'],
+    ['24¾', '24.75'],
+    ['24³', '24.75'],
+    ['24 3/4', '24.75'],
+    ['24-3/4', '24.75'],
+    ['¾', '0.75'],
+    ['5/8', '0.625'],
+    [' 11 ', '11'],
+  ])('reads %s as %s', (text, figure) => {
+    expect(readMixedNumber(text)?.toFixed()).toBe(figure);
+  });
+
+  it.each(['', '-1', '1/0', 'NaN', '1e3', '24 ¾ ¾', 'eleven', '0x10', 'Infinity'])(
+    'refuses %s',
+    (text) => {
+      expect(readMixedNumber(text)).toBeUndefined();
+    },
+  );
+
+  it('turns square feet into mm² exactly', () => {
+    expect(readArea('24.7', 'ft2')).toBe('2294705.088');
+    expect(readArea('1', 'ft2')).toBe('92903.04');
+  });
+
+  it('keeps a 64th of an inch exact', () => {
+    expect(readLength('1/64', 'in')).toBe('0.396875');
+    expect(lengthFigure('0.396875', 'in', 6)).toBe('0.015625');
+  });
+
+  it('shows again what was typed, tenth of a foot by tenth of a foot', () => {
+    for (let tenths = 0; tenths < 300; tenths += 1) {
+      const typed = String(tenths / 10);
+      expect(areaFigure(readArea(typed, 'ft2') ?? '', 'ft2', 4)).toBe(typed);
+    }
+  });
+});

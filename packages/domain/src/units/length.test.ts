@@ -1,0 +1,26 @@
+import { describe, expect, it } from 'vitest';
+import { parseLength } from './length.ts';
+
+describe('parseLength', () => {
+  it.each([
+    ['95', 'mm', '95'],
+    ['0.5', 'in', '12.7'],
+    ['4 3/8', 'in', '111.125'],
+    ['3/8', 'in', '9.525'],
+    ['1/64', 'in', '0.396875'],
+    ['11', 'in', '279.4'],
+    ['11 in', 'mm', '279.4'],
+    ['95 mm', 'in', '95'],
+    ['2"', 'mm', '50.8'],
+  ] as const)('reads %s (%s) as %s mm', (text, unit, mm) => {
+    expect(parseLength(text, unit).toFixed()).toBe(mm);
+  });
+
+  it.each(['', '4 3', '-4', '4,5', '1e2', 'NaN', '3/', '4 3/8/2', '5 cm'])('refuses "%s"', (text) => {
+    expect(() => parseLength(text, 'in')).toThrow('Write the length in inches');
+  });
+
+  it('refuses a fraction over zero', () => {
+    expect(() => parseLength('3/0', 'mm')).toThrow('cannot be over 0');
+  });
+});

@@ -1,0 +1,6 @@
+declare module 'jstat' {
+  const jstat: {
+    binomial: { cdf: (successes: number, trials: number, rate: number) => number };
+  };
+  export default jstat;
+}
