@@ -1,7 +1,9 @@
 // `npm run -s compute -- NAME < in.json`: one number of the domain, checked without the web page.
 import { readFileSync } from 'node:fs';
-import { tsImport } from 'tsx/esm/api';
+import { ensureInstalled } from './workspace/installed.mjs';
 
+await ensureInstalled();
+const { tsImport } = await import('tsx/esm/api');
 const { compute, DomainError } = await tsImport('../packages/domain/src/index.ts', import.meta.url);
 
 try {

@@ -19,5 +19,12 @@ const entities: Plugin = {
 
 export default defineConfig({
   plugins: [entities],
-  test: { name: 'api', include: ['src/**/*.test.ts'], testTimeout: 60_000, hookTimeout: 60_000 },
+  test: {
+    name: 'api',
+    include: ['src/**/*.test.ts'],
+    // Reading the whole application in takes longer than most tests; each shop has a database of its own.
+    isolate: false,
+    testTimeout: 60_000,
+    hookTimeout: 60_000,
+  },
 });

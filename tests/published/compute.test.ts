@@ -5,7 +5,10 @@ import { describe, expect, it } from 'vitest';
 const script = fileURLToPath(new URL('../../scripts/compute.mjs', import.meta.url));
 
 function run(name: string, input: string) {
-  const { status, stdout, stderr } = spawnSync(process.execPath, [script, name], { input, encoding: 'utf8' });
+  const { status, stdout, stderr } = spawnSync(process.execPath, [script, name], {
+    input,
+    encoding: 'utf8',
+  });
   return { status, stdout, stderr };
 }
 
@@ -15,7 +18,9 @@ describe('the compute command', { timeout: 60_000 }, () => {
     const { status, stdout } = run('cut-count', '{"good":100,"rate":0.95,"confidence":0.95}');
     expect(status).toBe(0);
     expect(JSON.parse(stdout)).toMatchObject({ pieces: 109 });
-    expect(JSON.parse(run('convert', '{"value":8,"from":"oz","to":"mm"}').stdout)).toEqual({ value: 3.175 });
+    expect(JSON.parse(run('convert', '{"value":8,"from":"oz","to":"mm"}').stdout)).toEqual({
+      value: 3.175,
+    });
   });
 
   it.each([

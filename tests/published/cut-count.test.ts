@@ -4,7 +4,7 @@ import { describe, expect, it } from 'vitest';
 import plan from './binomial-plan.json' with { type: 'json' };
 
 // Source of both tables: named in binomial-plan.json beside them.
-describe('cut counts', () => {
+describe('cut counts', { timeout: 60_000 }, () => {
   it(`are those of all ${plan.rows.length} rows of the binomial table`, () => {
     const wrong = plan.rows.filter(([good = 0, rate = 0, confidence = 0, pieces]) => {
       return cutCount({ good, rate, confidence }).pieces !== pieces;
@@ -40,7 +40,10 @@ describe('rolled yield', () => {
   // Pyzdek, The Six Sigma Project Planner (2003), p. 241: four steps, 0.979, start 1,022 for 1,000.
   // (Author and year from memory.)
   it('is 0.979 for the four steps of a published example, and needs 1,022 for 1,000', () => {
-    const { yield: share, start } = rolledYield({ rates: [0.995, 0.985, 0.999, 0.99995], good: 1000 });
+    const { yield: share, start } = rolledYield({
+      rates: [0.995, 0.985, 0.999, 0.99995],
+      good: 1000,
+    });
     expect(share).toBeCloseTo(0.979, 3);
     expect(start).toBe(1022);
   });

@@ -2,5 +2,5 @@ declare module 'jstat' {
   const jstat: {
     binomial: { cdf: (successes: number, trials: number, rate: number) => number };
   };
-  export default jstat;
+  export = jstat;
 }

@@ -19,14 +19,17 @@ describe('round pieces in rows', () => {
     [100, 20, 10, 20],
     [120, 120, 50, 4],
     [1000, 300, 50, 121],
-  ])('from %i × %i mm, %i mm across, are at least as many as by formula', (widthMm, heightMm, d, least) => {
-    const container = { form: 'panel' as const, widthMm, heightMm };
-    const { pieces } = layOut({ outline: round(d), spacingMm: 0, trimMm: 0, container });
-    const [a, b] = [widthMm - d, heightMm - d];
-    const most = Math.floor(((2 / Math.sqrt(3)) * a * b) / (d * d) + (a + b) / d + 1 + 1e-9);
-    expect(pieces).toBeGreaterThanOrEqual(least);
-    expect(pieces).toBeLessThanOrEqual(most);
-  });
+  ])(
+    'from %i × %i mm, %i mm across, are at least as many as by formula',
+    (widthMm, heightMm, d, least) => {
+      const container = { form: 'panel' as const, widthMm, heightMm };
+      const { pieces } = layOut({ outline: round(d), spacingMm: 0, trimMm: 0, container });
+      const [a, b] = [widthMm - d, heightMm - d];
+      const most = Math.floor(((2 / Math.sqrt(3)) * a * b) / (d * d) + (a + b) / d + 1 + 1e-9);
+      expect(pieces).toBeGreaterThanOrEqual(least);
+      expect(pieces).toBeLessThanOrEqual(most);
+    },
+  );
 
   // Füredi, "The densest packing of equal circles into a parallel strip", Discrete & Computational
   // Geometry 6 (1991), from memory: two rows in a strip of d (1 + √3/2) need d/2 per piece.

@@ -42,7 +42,16 @@ describe('tax by rate', () => {
   // ten lines at 21 %; tax rounded line by line would come to 190.88.
   it('is that of the official example with ten lines', () => {
     const amounts = [
-      '140.80', '16.16', '167.64', '88.74', '36.75', '56.50', '83.34', '190.31', '64.21', '64.46',
+      '140.80',
+      '16.16',
+      '167.64',
+      '88.74',
+      '36.75',
+      '56.50',
+      '83.34',
+      '190.31',
+      '64.21',
+      '64.46',
     ];
     const lines = amounts.map((amount) => ({ amount, taxRatePercent: '21' }));
     expect(invoiceTotals(lines)).toEqual({

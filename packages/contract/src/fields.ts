@@ -1,14 +1,13 @@
 import { z } from 'zod';
 
-/** Exact decimals travel as text. The patterns refuse NaN, exponents, a lone minus and superfluous zeros before the point. */
+/** Exact decimals travel as text. The patterns refuse NaN, exponents, minus nought and superfluous zeros. */
 function decimalText(whole: number, places: number, example: string, sentence: string, signed = false) {
-  const sign = signed ? '-?' : '';
+  const sign = signed ? '(?!-0(?:\\.0+)?$)-?' : '';
   const pattern = new RegExp(`^${sign}(0|[1-9]\\d{0,${whole - 1}})${places > 0 ? `(\\.\\d{1,${places}})?` : ''}$`);
   return z
     .string(sentence)
     .trim()
     .regex(pattern, sentence)
-    .refine((text) => !/^-0(\.0+)?$/.test(text), sentence)
     .meta({ example });
 }
 

@@ -3,12 +3,13 @@ import { DomainError, InvalidInput, checkOutline } from '@hidewright/domain';
 import { endpoint } from './endpoint.ts';
 import { id, idParams, lengthMm, positiveCount } from './fields.ts';
 import { outlineOf } from './layout-asked.ts';
-import { onceSound } from './once-sound.ts';
 
-/** A length within limits, with a sentence that names it. */
+/** A length within limits; whatever is wrong with it, the sentence names it. */
 function length(word: string, min: number, max: number) {
-  const sentence = `Enter the ${word}: ${min} to ${max} mm.`;
-  return lengthMm.refine((text) => Number(text) >= min && Number(text) <= max, onceSound(sentence));
+  const sentence = `Enter the ${word}, from ${min} to ${max} mm.`;
+  const fits = (text: string) =>
+    lengthMm.safeParse(text).success && Number(text) >= min && Number(text) <= max;
+  return z.string(sentence).trim().refine(fits, sentence).meta({ example: '95' });
 }
 
 const side = (word: string) => length(word, 1, 5000);

@@ -15,16 +15,16 @@ export const workStep = z.strictObject({
   rejectPercent,
 });
 
+const perHundred = 'Enter how many minutes 100 pieces take, such as 180 or 92.5.';
+const takesTime = (text: string) => minutes.safeParse(text).success && Number(text) > 0;
+
 /** How long the work takes: one figure for 100 pieces to begin with, or step by step. The domain's WorkPlan. */
 export const workPlan = z.discriminatedUnion(
   'kind',
   [
     z.strictObject({
       kind: z.literal('minutesPer100'),
-      minutes: minutes.refine(
-        (text) => Number(text) > 0,
-        onceSound('Enter how many minutes 100 pieces take.'),
-      ),
+      minutes: z.string(perHundred).trim().refine(takesTime, perHundred).meta({ example: '180' }),
       rejectPercent,
     }),
     z.strictObject({

@@ -1,5 +1,12 @@
 export * from './errors/domain-error.ts';
-export { Exact, readDecimal, readWhole, toAtMost, toPlaces, toText } from './numbers/decimal-text.ts';
+export {
+  Exact,
+  readDecimal,
+  readWhole,
+  toAtMost,
+  toPlaces,
+  toText,
+} from './numbers/decimal-text.ts';
 export type { DecimalText, Limits } from './numbers/decimal-text.ts';
 
 export * from './units/measures.ts';

@@ -16,6 +16,8 @@ interface Asked {
   taxRateId: number | null;
 }
 
+const ready: readonly Order['state'][] = ['packed', 'part shipped', 'shipped'];
+
 /**
  * Drafts the invoice of an order: its pieces at the agreed price, and tooling as a line of its own.
  * @throws {Problem} 409 when the order is not packed or shipped, or has an invoice; 422 for a rate that cannot be used
@@ -54,7 +56,7 @@ async function requireInvoiceable(work: Work, order: Order): Promise<void> {
       existing.number === null ? 'has a draft invoice' : `was invoiced as ${existing.number}`;
     throw wrongState(`${order.number} ${which} already. Open that one.`, ['open its invoice']);
   }
-  if (order.state !== 'packed' && order.state !== 'shipped') {
+  if (!ready.includes(order.state)) {
     throw wrongState(
       `${order.number} is ${order.state}. It can be invoiced once it is packed.`,
       [],

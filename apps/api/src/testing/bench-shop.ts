@@ -88,3 +88,8 @@ export async function takenOn(ready: BenchShop, quantity = 50, change: object = 
 export async function ticketOf(ready: BenchShop, order: Order): Promise<Job> {
   return (await ready.shop.as('maker').get(`/api/jobs/${order.job.id}`).expect(200)).body as Job;
 }
+
+export async function setBenchHours({ shop }: BenchShop, benchHoursPerDay: string): Promise<void> {
+  const { version } = (await shop.as('owner').get('/api/workshop').expect(200)).body as { version: number };
+  await shop.as('owner').patch('/api/workshop').set('If-Match', `"${version}"`).send({ benchHoursPerDay }).expect(200);
+}

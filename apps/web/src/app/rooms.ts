@@ -44,7 +44,7 @@ export const rooms: readonly Room[] = [
     path: '/stockroom',
     word: 'Stockroom',
     icon: 'stockroom',
-    roles: ['owner', 'maker'],
+    roles: ['owner', 'maker', 'bookkeeper'],
     bar: ['owner', 'maker'],
   },
   {

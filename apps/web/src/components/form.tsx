@@ -1,6 +1,6 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useId, useState, type ReactNode } from 'react';
-import { FormProvider, useForm, type DefaultValues, type FieldValues } from 'react-hook-form';
+import { FormProvider, useForm, type FieldValues } from 'react-hook-form';
 import type { z } from 'zod';
 import { ApiProblem } from '../lib/api-problem.ts';
 import { Button } from './button.tsx';
@@ -9,6 +9,7 @@ import { fieldId, FormIdContext } from './form-context.ts';
 import { formField, listErrors } from './form-errors.ts';
 import { Notice } from './notice.tsx';
 import { StaleNotice } from './stale-notice.tsx';
+import type { Unfinished } from './unfinished.ts';
 import { useFormDraft } from './use-form-draft.ts';
 
 type BodySchema = z.ZodType<FieldValues, FieldValues>;
@@ -16,7 +17,7 @@ type BodySchema = z.ZodType<FieldValues, FieldValues>;
 export interface FormProps<Schema extends BodySchema> {
   /** The endpoint's own body, from the contract. */
   schema: Schema | undefined;
-  defaults: DefaultValues<z.input<Schema>>;
+  defaults: Unfinished<z.input<Schema>>;
   /** Sends it; whatever it throws is shown, and what was typed stays. */
   onSend: (values: z.input<Schema>) => Promise<unknown>;
   submitWord: string;
@@ -27,7 +28,7 @@ export interface FormProps<Schema extends BodySchema> {
   /** Under which it survives a reload; none for what must not be kept, such as passwords. */
   draftKey?: string | undefined;
   /** For an edit: reads the thing again after somebody else changed it, and gives what is there now. */
-  onReload?: (() => Promise<DefaultValues<z.input<Schema>>>) | undefined;
+  onReload?: (() => Promise<Unfinished<z.input<Schema>>>) | undefined;
   /** Starts again with the defaults once it was sent, for adding one after the other. */
   again?: boolean | undefined;
   children: ReactNode;

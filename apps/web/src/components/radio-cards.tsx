@@ -5,7 +5,8 @@ import { describedBy, FieldHelp, type FieldLabels } from './field.tsx';
 import { useField } from './use-field.ts';
 
 export interface RadioCard {
-  value: string | number;
+  /** Null where "none" is an answer too. */
+  value: string | number | null;
   label: ReactNode;
   detail?: ReactNode | undefined;
   /** At the right: a price, or "included". */
@@ -34,7 +35,7 @@ export function RadioCards({ name, cards, across, label, help, optional }: Radio
         render={({ field }) => (
           <div className={classNames('grid gap-1.5', across && 'sm:grid-cols-2')}>
             {cards.map((card, index) => (
-              <label key={card.value} className={cardLook(field.value === card.value)}>
+              <label key={String(card.value)} className={cardLook(field.value === card.value)}>
                 <input
                   id={index === 0 ? id : `${id}-${index}`}
                   ref={index === 0 ? field.ref : undefined}

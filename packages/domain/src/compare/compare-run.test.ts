@@ -1,8 +1,21 @@
 import { describe, expect, it } from 'vitest';
 import { compareRun } from './compare-run.ts';
 
-const estimate = { cut: 112, good: 100, minutes: '168', leatherAreaMm2: '600000', rejectPercent: '10' };
-const fact = { cut: 112, good: 104, rejects: 5, seconds: 3, minutes: '196', leatherAreaMm2: '660000' };
+const estimate = {
+  cut: 112,
+  good: 100,
+  minutes: '168',
+  leatherAreaMm2: '600000',
+  rejectPercent: '10',
+};
+const fact = {
+  cut: 112,
+  good: 104,
+  rejects: 5,
+  seconds: 3,
+  minutes: '196',
+  leatherAreaMm2: '660000',
+};
 
 describe('estimate and fact', () => {
   it('stand side by side, with how far the fact lies above', () => {
@@ -19,10 +32,15 @@ describe('estimate and fact', () => {
   it('divides by nothing where nothing was said or cut', () => {
     const nothing = { ...fact, cut: 0, good: 0, rejects: 0, seconds: 0 };
     const rows = compareRun({ estimate: { ...estimate, rejectPercent: '0' }, fact: nothing });
-    expect(rows.find(({ name }) => name === 'rejects')).toMatchObject({ was: '0', overPercent: null });
+    expect(rows.find(({ name }) => name === 'rejects')).toMatchObject({
+      was: '0',
+      overPercent: null,
+    });
   });
 
   it('refuses more pieces counted than cut', () => {
-    expect(() => compareRun({ estimate, fact: { ...fact, good: 110 } })).toThrow('correct the counts');
+    expect(() => compareRun({ estimate, fact: { ...fact, good: 110 } })).toThrow(
+      'correct the counts',
+    );
   });
 });

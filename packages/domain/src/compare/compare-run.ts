@@ -1,6 +1,12 @@
 import type { Decimal } from 'decimal.js';
 import { InvalidInput } from '../errors/domain-error.ts';
-import { type DecimalText, Exact, readDecimal, readWhole, toAtMost } from '../numbers/decimal-text.ts';
+import {
+  type DecimalText,
+  Exact,
+  readDecimal,
+  readWhole,
+  toAtMost,
+} from '../numbers/decimal-text.ts';
 
 /** What was said of a run when it was quoted. */
 export interface RunEstimate {
@@ -39,7 +45,13 @@ export interface CompareRow {
  * pieces cut; seconds count as made, not as rejects.
  * @throws InvalidInput
  */
-export function compareRun({ estimate, fact }: { estimate: RunEstimate; fact: RunFact }): CompareRow[] {
+export function compareRun({
+  estimate,
+  fact,
+}: {
+  estimate: RunEstimate;
+  fact: RunFact;
+}): CompareRow[] {
   checkFact(fact);
   const whole = (value: number) => new Exact(value);
   return [
@@ -78,5 +90,11 @@ function row(
   places: number,
 ): CompareRow {
   const over = said.isZero() ? null : toAtMost(was.minus(said).div(said).times(100), 1);
-  return { name, said: toAtMost(said, places), was: toAtMost(was, places), unit, overPercent: over };
+  return {
+    name,
+    said: toAtMost(said, places),
+    was: toAtMost(was, places),
+    unit,
+    overPercent: over,
+  };
 }

@@ -29,7 +29,11 @@ describe('compute', () => {
     ['round', { value: '1e5', places: 2, mode: 'halfUp' }, 'plain decimal text'],
     ['round', { places: 2, mode: 'halfUp' }, 'Give value.'],
     ['cut-count', { good: 10, confidence: 0.95 }, 'either rate or history'],
-    ['cut-count', { good: 10, rate: 0.9, history: { good: 1, total: 2 }, confidence: 0.95 }, 'either rate or history'],
+    [
+      'cut-count',
+      { good: 10, rate: 0.9, history: { good: 1, total: 2 }, confidence: 0.95 },
+      'either rate or history',
+    ],
     ['cut-count', { good: 10, rate: '0.9', confidence: 0.95 }, 'Give rate as a number'],
     ['cut-count', { good: 10, rate: 0.9, confidence: 0.95, sure: true }, 'Leave out sure'],
     ['allocate', { amount: '1.00', weights: [] }, 'at least one entry'],

@@ -28,7 +28,10 @@ export const computeNames = Object.keys(answers);
 export function compute(name: string, input: unknown): Answer {
   const answer = Object.hasOwn(answers, name) ? answers[name] : undefined;
   if (!answer) {
-    throw new InvalidInput('name', `There is no ${name || 'nameless'} computation: choose ${computeNames.join(', ')}.`);
+    throw new InvalidInput(
+      'name',
+      `There is no ${name || 'nameless'} computation: choose ${computeNames.join(', ')}.`,
+    );
   }
   return answer(input);
 }

@@ -12,7 +12,10 @@ export class InputReader {
     this.#fields = { ...input };
     const unknown = Object.keys(this.#fields).find((name) => !known.includes(name));
     if (unknown !== undefined) {
-      throw new InvalidInput(unknown, `Leave out ${unknown}: only ${known.join(', ')} are understood.`);
+      throw new InvalidInput(
+        unknown,
+        `Leave out ${unknown}: only ${known.join(', ')} are understood.`,
+      );
     }
   }
 

@@ -49,7 +49,10 @@ const checkMoney = (text: string, field: string, places: number): unknown =>
 function checkConfidence(percent: string): void {
   const value = readDecimal(percent, 'confidencePercent', { min: 1, places: 4 });
   if (value.gte(100)) {
-    throw new InvalidInput('confidencePercent', 'Nothing is certain: write less than 100 %, such as 95.');
+    throw new InvalidInput(
+      'confidencePercent',
+      'Nothing is certain: write less than 100 %, such as 95.',
+    );
   }
 }
 

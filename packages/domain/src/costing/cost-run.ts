@@ -55,7 +55,9 @@ export function costRun(input: RunInput, quantity: number): RunCost {
   const area = new Exact(input.layout.containerAreaMm2).times(full.containers);
   const bench = benchMinutes(input.work, { pieces: cut.pieces, containers: full.containers }).total;
   if (new Exact(bench).isZero()) {
-    throw new NotWorkable('Say how many minutes 100 pieces take: without bench time nothing is earned per hour.');
+    throw new NotWorkable(
+      'Say how many minutes 100 pieces take: without bench time nothing is earned per hour.',
+    );
   }
   const lines = new LineWriter(input.minorDigits, quantity);
   addLeather(lines, input, full.containers, area);

@@ -1,6 +1,12 @@
 import type { Decimal } from 'decimal.js';
 import { InvalidInput } from '../errors/domain-error.ts';
-import { type DecimalText, Exact, readDecimal, readWhole, toPlaces } from '../numbers/decimal-text.ts';
+import {
+  type DecimalText,
+  Exact,
+  readDecimal,
+  readWhole,
+  toPlaces,
+} from '../numbers/decimal-text.ts';
 
 /**
  * Splits an amount by weights so that the parts sum to it exactly: each part is cut down to the

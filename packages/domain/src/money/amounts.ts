@@ -43,7 +43,10 @@ export function sumMoney(amounts: readonly DecimalText[], digits: number): Decim
 
 function checkSize(value: Decimal, digits: number, field: string): Decimal {
   if (value.abs().times(new Exact(10).pow(digits)).gt(mostMinorUnits)) {
-    throw new InvalidInput(field, 'That amount is larger than the books can hold: write a smaller one.');
+    throw new InvalidInput(
+      field,
+      'That amount is larger than the books can hold: write a smaller one.',
+    );
   }
   return value;
 }

@@ -18,8 +18,18 @@ describe('invoiceTotals', () => {
     fc.assert(
       fc.property(fc.array(aLine), (lines) => {
         const totals = invoiceTotals(lines);
-        expect(totals.net).toBe(sumMoney(lines.map(({ amount }) => amount), 2));
-        expect(totals.tax).toBe(sumMoney(totals.taxes.map(({ tax }) => tax), 2));
+        expect(totals.net).toBe(
+          sumMoney(
+            lines.map(({ amount }) => amount),
+            2,
+          ),
+        );
+        expect(totals.tax).toBe(
+          sumMoney(
+            totals.taxes.map(({ tax }) => tax),
+            2,
+          ),
+        );
         expect(totals.total).toBe(sumMoney([totals.net, totals.tax], 2));
       }),
     );
@@ -50,7 +60,9 @@ describe('invoiceTotals', () => {
   });
 
   it('refuses an amount with too many decimals and a rate below zero', () => {
-    expect(() => invoiceTotals([{ amount: '1.005', taxRatePercent: null }])).toThrow('lines.0.amount');
+    expect(() => invoiceTotals([{ amount: '1.005', taxRatePercent: null }])).toThrow(
+      'lines.0.amount',
+    );
     expect(() => invoiceTotals([{ amount: '1.00', taxRatePercent: '-1' }])).toThrow('0 or more');
   });
 });

@@ -2,20 +2,38 @@ import { describe, expect, it } from 'vitest';
 import { Exact, readDecimal, readWhole, toAtMost, toPlaces, toText } from './decimal-text.ts';
 
 describe('readDecimal', () => {
-  it.each(['0', '12', '12.50', '-3', '0.0001', '123456789012345678901234.5'])('reads %s', (text) => {
-    expect(readDecimal(text, 'price').eq(text)).toBe(true);
-  });
-
-  it.each(['', ' 1', 'NaN', 'Infinity', '-0', '-0.00', '1e3', '1e309', '1,5', '.5', '5.', '+1', '0x1f', '--1'])(
-    'refuses "%s" and names the field',
+  it.each(['0', '12', '12.50', '-3', '0.0001', '123456789012345678901234.5'])(
+    'reads %s',
     (text) => {
-      expect(() => readDecimal(text, 'price')).toThrow(expect.objectContaining({ field: 'price' }));
+      expect(readDecimal(text, 'price').eq(text)).toBe(true);
     },
   );
 
-  it.each([12, null, undefined, ['1'], { valueOf: () => '1' }])('refuses %s, which is no text', (value) => {
-    expect(() => readDecimal(value, 'price')).toThrow('Write price as a plain number');
+  it.each([
+    '',
+    ' 1',
+    'NaN',
+    'Infinity',
+    '-0',
+    '-0.00',
+    '1e3',
+    '1e309',
+    '1,5',
+    '.5',
+    '5.',
+    '+1',
+    '0x1f',
+    '--1',
+  ])('refuses "%s" and names the field', (text) => {
+    expect(() => readDecimal(text, 'price')).toThrow(expect.objectContaining({ field: 'price' }));
   });
+
+  it.each([12, null, undefined, ['1'], { valueOf: () => '1' }])(
+    'refuses %s, which is no text',
+    (value) => {
+      expect(() => readDecimal(value, 'price')).toThrow('Write price as a plain number');
+    },
+  );
 
   it('keeps to the limits, and says them', () => {
     expect(() => readDecimal('-1', 'price', { min: 0 })).toThrow('Write price as 0 or more.');
@@ -27,7 +45,9 @@ describe('readDecimal', () => {
 
 describe('readWhole', () => {
   it.each([1.5, Number.NaN, Infinity, -0, -1, 2 ** 53, '3'])('refuses %s', (value) => {
-    expect(() => readWhole(value, 'quantity')).toThrow(expect.objectContaining({ field: 'quantity' }));
+    expect(() => readWhole(value, 'quantity')).toThrow(
+      expect.objectContaining({ field: 'quantity' }),
+    );
   });
 });
 

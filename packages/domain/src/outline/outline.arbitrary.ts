@@ -9,28 +9,39 @@ const share = fc.integer({ min: 0, max: 20 }).map((twentieths) => twentieths / 2
 /** For the tests: outlines of the sizes that small leather goods have. */
 export const anOutline: fc.Arbitrary<Outline> = fc.oneof(
   mm(12, 120).map((diameterMm): Outline => ({ shape: 'round', diameterMm })),
-  fc.tuple(mm(10, 150), mm(10, 150)).map(
-    ([widthMm, heightMm]): Outline => ({ shape: 'oval', widthMm, heightMm }),
-  ),
-  fc.tuple(mm(10, 150), mm(10, 150), share).map(
-    ([widthMm, heightMm, round]): Outline => ({
-      shape: 'rectangle',
-      widthMm,
-      heightMm,
-      cornerRadiusMm: (Math.min(widthMm, heightMm) / 2) * round,
-    }),
-  ),
+  fc
+    .tuple(mm(10, 150), mm(10, 150))
+    .map(([widthMm, heightMm]): Outline => ({ shape: 'oval', widthMm, heightMm })),
+  fc.tuple(mm(10, 150), mm(10, 150), share).map(([widthMm, heightMm, round]): Outline => ({
+    shape: 'rectangle',
+    widthMm,
+    heightMm,
+    cornerRadiusMm: (Math.min(widthMm, heightMm) / 2) * round,
+  })),
   aTag(),
 );
 
 /** For the tests: tags with necks of all kinds. */
 export function aTag(): fc.Arbitrary<Outline> {
   return fc
-    .tuple(mm(30, 150), mm(15, 80), fc.integer({ min: 2, max: 16 }), fc.integer({ min: 3, max: 18 }), share)
+    .tuple(
+      mm(30, 150),
+      mm(15, 80),
+      fc.integer({ min: 2, max: 16 }),
+      fc.integer({ min: 3, max: 18 }),
+      share,
+    )
     .map(([lengthMm, widthMm, neckLength, neckWidth, round]): Outline => {
       const neckLengthMm = (lengthMm * neckLength) / 20;
       const neckWidthMm = (widthMm * neckWidth) / 20;
       const most = Math.min(widthMm, lengthMm - neckLengthMm) / 2;
-      return { shape: 'tag', lengthMm, widthMm, neckLengthMm, neckWidthMm, cornerRadiusMm: most * round };
+      return {
+        shape: 'tag',
+        lengthMm,
+        widthMm,
+        neckLengthMm,
+        neckWidthMm,
+        cornerRadiusMm: most * round,
+      };
     });
 }

@@ -31,7 +31,7 @@ function perimeter(polygon: Point[]): number {
   }, 0);
 }
 
-describe('the polygon of an outline', () => {
+describe('the polygon of an outline', { timeout: 60_000 }, () => {
   it('is counter-clockwise, has nearly the area and edge of the curve, and its box', () => {
     fc.assert(
       fc.property(anOutline, (outline) => {
@@ -65,10 +65,18 @@ describe('measures', () => {
   it('are those of the textbook', () => {
     expect(outlineArea({ shape: 'round', diameterMm: 95 })).toBeCloseTo((Math.PI * 95 * 95) / 4, 9);
     expect(cuttingEdgeMm({ shape: 'round', diameterMm: 95 })).toBeCloseTo(Math.PI * 95, 9);
-    const rectangle: Outline = { shape: 'rectangle', widthMm: 80, heightMm: 50, cornerRadiusMm: 10 };
+    const rectangle: Outline = {
+      shape: 'rectangle',
+      widthMm: 80,
+      heightMm: 50,
+      cornerRadiusMm: 10,
+    };
     expect(outlineArea(rectangle)).toBeCloseTo(4000 - (4 - Math.PI) * 100, 9);
     expect(cuttingEdgeMm(rectangle)).toBeCloseTo(260 - 80 + 20 * Math.PI, 9);
-    expect(outlineArea({ shape: 'oval', widthMm: 60, heightMm: 90 })).toBeCloseTo(Math.PI * 1350, 9);
+    expect(outlineArea({ shape: 'oval', widthMm: 60, heightMm: 90 })).toBeCloseTo(
+      Math.PI * 1350,
+      9,
+    );
   });
 
   it('of a sharp tag are those of body, shoulder and neck', () => {

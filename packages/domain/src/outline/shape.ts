@@ -3,8 +3,7 @@ import type { Outline, Rectangle, Tag } from './outline.ts';
 
 /** An outline as geometry: an ellipse about the origin, or a closed chain of lines and arcs. */
 export type Shape =
-  | { kind: 'ellipse'; radiusX: number; radiusY: number }
-  | { kind: 'chain'; stretches: Stretch[] };
+  { kind: 'ellipse'; radiusX: number; radiusY: number } | { kind: 'chain'; stretches: Stretch[] };
 
 /** The curve of an outline, counter-clockwise. The outline has been checked. */
 export function shapeOf(outline: Outline): Shape {

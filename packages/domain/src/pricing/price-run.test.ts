@@ -26,7 +26,9 @@ const run: RunInput = {
 };
 
 const money = (min: number, max: number) =>
-  fc.integer({ min: min * 100, max: max * 100 }).map((cents) => new Exact(cents).div(100).toFixed(2));
+  fc
+    .integer({ min: min * 100, max: max * 100 })
+    .map((cents) => new Exact(cents).div(100).toFixed(2));
 
 const aRun: fc.Arbitrary<RunInput> = fc.record({
   breaks: fc
@@ -40,7 +42,11 @@ const aRun: fc.Arbitrary<RunInput> = fc.record({
   }),
   leather: fc.record({ name: fc.constant('Side'), pricePerFt2: money(1, 40) }),
   hardware: fc.array(
-    fc.record({ name: fc.constant('Rivet'), unitPrice: money(0, 3), perPiece: fc.integer({ min: 1, max: 4 }) }),
+    fc.record({
+      name: fc.constant('Rivet'),
+      unitPrice: money(0, 3),
+      perPiece: fc.integer({ min: 1, max: 4 }),
+    }),
     { maxLength: 3 },
   ),
   tooling: fc.array(
@@ -64,14 +70,16 @@ const first = (input: RunInput): BreakNumbers => priceRun(input).breaks[0] as Br
 const each = (numbers: BreakNumbers, name: string) =>
   numbers.costLines.find((line) => line.name === name)?.each;
 
-describe('the numbers of a run', () => {
+describe('the numbers of a run', { timeout: 60_000 }, () => {
   // Common practice, no source: these three are how a shop reckons on paper.
   it('costs 0.50 of leather where 10.00 per ft² gives 20 pieces', () => {
     expect(each(first(run), 'Russet side')).toBe('0.5000');
   });
 
   it('costs 1.67 of materials with a rivet and a ring', () => {
-    const materials = first(run).costLines.filter(({ kind }) => kind === 'leather' || kind === 'hardware');
+    const materials = first(run).costLines.filter(
+      ({ kind }) => kind === 'leather' || kind === 'hardware',
+    );
     const sum = materials.reduce((total, line) => total.plus(line.each), new Exact(0));
     expect(sum.toFixed(2)).toBe('1.67');
   });
@@ -157,7 +165,11 @@ describe('the numbers of a run', () => {
   it('keeps tooling out of the unit cost and the suggested price', () => {
     const breaks = [{ quantity: 20, typedPrice: null }];
     const plain = first({ ...run, breaks });
-    const tooled = first({ ...run, breaks, tooling: [{ name: 'Plate', cost: '85.00', charge: '85.00' }] });
+    const tooled = first({
+      ...run,
+      breaks,
+      tooling: [{ name: 'Plate', cost: '85.00', charge: '85.00' }],
+    });
     expect(tooled.unitCost).toBe(plain.unitCost);
     expect(tooled.suggestedPrice).toBe(plain.suggestedPrice);
     expect(tooled.perBenchHour).toBe(plain.perBenchHour);
@@ -180,7 +192,11 @@ describe('warnings', () => {
 
   it('says that a rung loses money, misses the target, and which price reaches it', () => {
     const numbers = first({ ...run, breaks: [typed(20, '2.00')] });
-    expect(numbers).toMatchObject({ loses: true, reachesTarget: false, priceThatReachesTarget: '3.2' });
+    expect(numbers).toMatchObject({
+      loses: true,
+      reachesTarget: false,
+      priceThatReachesTarget: '3.2',
+    });
     expect(numbers.warnings).toEqual([
       'At 20 this run loses 11.40: it costs more than it brings, wages included.',
       'At 20 it leaves 13.20 per bench hour, below your 60.00: 3.2 each would reach it.',

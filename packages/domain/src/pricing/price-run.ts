@@ -34,7 +34,8 @@ function rung(
   suggestedPrice: string,
   typedPrice: string | null,
 ): BreakNumbers {
-  const priceEach = typedPrice === null ? suggestedPrice : toText(readDecimal(typedPrice, 'typedPrice'));
+  const priceEach =
+    typedPrice === null ? suggestedPrice : toText(readDecimal(typedPrice, 'typedPrice'));
   const earnings = earn(cost, priceEach, toolingCharge(input), input.minorDigits);
   return {
     ...cost,

@@ -39,7 +39,9 @@ export function bookHours(time: BenchTime, minutes: DecimalText): Booking {
     left = left.minus(taken);
     if (left.isZero()) return { day, bookings };
   }
-  throw new NotWorkable('That does not fit into the next three years: check the bench minutes of a day.');
+  throw new NotWorkable(
+    'That does not fit into the next three years: check the bench minutes of a day.',
+  );
 }
 
 /** Free bench minutes from the first day up to and including a day. @throws InvalidInput */

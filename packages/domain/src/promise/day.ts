@@ -28,7 +28,8 @@ function countDays(year: number, month: number, date: number): number {
   const marchYear = month > 2 ? year : year - 1;
   const marchMonth = (month + 9) % 12;
   const dayOfYear = Math.floor((153 * marchMonth + 2) / 5) + date - 1;
-  const leapDays = Math.floor(marchYear / 4) - Math.floor(marchYear / 100) + Math.floor(marchYear / 400);
+  const leapDays =
+    Math.floor(marchYear / 4) - Math.floor(marchYear / 100) + Math.floor(marchYear / 400);
   return 365 * marchYear + leapDays + dayOfYear - daysTo1970FromMarch0;
 }
 

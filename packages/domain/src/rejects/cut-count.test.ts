@@ -17,33 +17,46 @@ function chance(pieces: number, good: number, rate: number): number {
   return sum;
 }
 
-describe('cutCount', () => {
+describe('cutCount', { timeout: 60_000 }, () => {
   it('is the smallest count that is sure enough', () => {
     fc.assert(
-      fc.property(fc.integer({ min: 1, max: 40 }), aRate.filter((rate) => rate > 0.3), aConfidence, (good, rate, confidence) => {
-        const { pieces, probability } = cutCount({ good, rate, confidence });
-        expect(probability).toBeCloseTo(chance(pieces, good, rate), 10);
-        expect(probability).toBeGreaterThanOrEqual(confidence - 1e-12);
-        if (pieces > good) expect(chance(pieces - 1, good, rate)).toBeLessThan(confidence);
-      }),
+      fc.property(
+        fc.integer({ min: 1, max: 40 }),
+        aRate.filter((rate) => rate > 0.3),
+        aConfidence,
+        (good, rate, confidence) => {
+          const { pieces, probability } = cutCount({ good, rate, confidence });
+          expect(probability).toBeCloseTo(chance(pieces, good, rate), 10);
+          expect(probability).toBeGreaterThanOrEqual(confidence - 1e-12);
+          if (pieces > good) expect(chance(pieces - 1, good, rate)).toBeLessThan(confidence);
+        },
+      ),
     );
   });
 
   it('never asks for fewer with more rejects, more sureness or a larger order', () => {
     fc.assert(
-      fc.property(fc.integer({ min: 1, max: 3000 }), aRate, aConfidence, (good, rate, confidence) => {
-        const { pieces } = cutCount({ good, rate, confidence });
-        const worse = Math.max(0.005, rate - 0.02);
-        expect(cutCount({ good, rate: worse, confidence }).pieces).toBeGreaterThanOrEqual(pieces);
-        expect(cutCount({ good: good + 1, rate, confidence }).pieces).toBeGreaterThan(pieces - 1);
-        const surer = Math.min(0.9999, confidence + 0.0005);
-        expect(cutCount({ good, rate, confidence: surer }).pieces).toBeGreaterThanOrEqual(pieces);
-      }),
+      fc.property(
+        fc.integer({ min: 1, max: 3000 }),
+        aRate,
+        aConfidence,
+        (good, rate, confidence) => {
+          const { pieces } = cutCount({ good, rate, confidence });
+          const worse = Math.max(0.005, rate - 0.02);
+          expect(cutCount({ good, rate: worse, confidence }).pieces).toBeGreaterThanOrEqual(pieces);
+          expect(cutCount({ good: good + 1, rate, confidence }).pieces).toBeGreaterThan(pieces - 1);
+          const surer = Math.min(0.9999, confidence + 0.0005);
+          expect(cutCount({ good, rate, confidence: surer }).pieces).toBeGreaterThanOrEqual(pieces);
+        },
+      ),
     );
   });
 
   it('cuts no more than ordered where nothing fails', () => {
-    expect(cutCount({ good: 250, rate: 1, confidence: 0.999 })).toEqual({ pieces: 250, probability: 1 });
+    expect(cutCount({ good: 250, rate: 1, confidence: 0.999 })).toEqual({
+      pieces: 250,
+      probability: 1,
+    });
   });
 
   it('is quick and near the normal approximation for a large order', () => {
@@ -81,7 +94,9 @@ describe('cutCount', () => {
   });
 
   it('gives up with a sentence where nearly everything fails', () => {
-    expect(() => cutCount({ good: 1000, rate: 0.00001, confidence: 0.95 })).toThrow('check the rejects');
+    expect(() => cutCount({ good: 1000, rate: 0.00001, confidence: 0.95 })).toThrow(
+      'check the rejects',
+    );
   });
 });
 

@@ -34,7 +34,10 @@ export function cutCount(input: CutByRate | CutByHistory): CutCount {
   const good = readWhole(input.good, 'good', 1, mostGood);
   const confidence = readShare(input.confidence, 'confidence');
   if (confidence >= 1) {
-    throw new InvalidInput('confidence', 'Nothing is certain: choose a confidence below 1, such as 0.95.');
+    throw new InvalidInput(
+      'confidence',
+      'Nothing is certain: choose a confidence below 1, such as 0.95.',
+    );
   }
   const waiting =
     'rate' in input
@@ -69,10 +72,16 @@ function waitingFromHistory(good: number, history: { good: number; total: number
   const total = readWhole(history.total, 'history.total', 0);
   const goodBefore = readWhole(history.good, 'history.good', 0);
   if (goodBefore > total) {
-    throw new InvalidInput('history.good', 'No more pieces can be good than were made: check the two counts.');
+    throw new InvalidInput(
+      'history.good',
+      'No more pieces can be good than were made: check the two counts.',
+    );
   }
   if (goodBefore === 0) {
-    throw new InvalidInput('history', 'There are no good pieces to learn from yet: enter a rate instead.');
+    throw new InvalidInput(
+      'history',
+      'There are no good pieces to learn from yet: enter a rate instead.',
+    );
   }
   const alpha = goodBefore + 0.5;
   const beta = total - goodBefore + 0.5;
@@ -81,7 +90,6 @@ function waitingFromHistory(good: number, history: { good: number; total: number
   return {
     logNoneFail,
     ratio: (failures) =>
-      ((good + failures) / (failures + 1)) *
-      ((beta + failures) / (alpha + beta + good + failures)),
+      ((good + failures) / (failures + 1)) * ((beta + failures) / (alpha + beta + good + failures)),
   };
 }

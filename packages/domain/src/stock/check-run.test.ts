@@ -63,7 +63,12 @@ describe('Can we make it?', () => {
 
 describe('chooseLots', () => {
   const tags = (lots: FreeLot[], feet: number) => chooseLots(lots, ft2(feet)).map(({ tag }) => tag);
-  const rack = [lot(1, 3, '2027-01-04'), lot(2, 12, '2027-02-01'), lot(3, 9, '2027-01-20'), lot(4, 15, '2027-03-01')];
+  const rack = [
+    lot(1, 3, '2027-01-04'),
+    lot(2, 12, '2027-02-01'),
+    lot(3, 9, '2027-01-20'),
+    lot(4, 15, '2027-03-01'),
+  ];
 
   it('prefers one lot that holds it all, the oldest such', () => {
     expect(tags(rack, 8)).toEqual(['L-3']);
@@ -76,7 +81,10 @@ describe('chooseLots', () => {
   });
 
   it('takes exactly what is needed, never more than a lot has, where there is enough', () => {
-    const someLots = fc.array(fc.tuple(fc.integer({ min: 0, max: 30 }), fc.integer({ min: 10, max: 28 })), { maxLength: 8 });
+    const someLots = fc.array(
+      fc.tuple(fc.integer({ min: 0, max: 30 }), fc.integer({ min: 10, max: 28 })),
+      { maxLength: 8 },
+    );
     fc.assert(
       fc.property(someLots, fc.integer({ min: 0, max: 120 }), (sizes, needed) => {
         const lots = sizes.map(([feet, day], at) => lot(at, feet, `2027-02-${day}`));

@@ -1,4 +1,10 @@
-import { Exact, readDecimal, readWhole, toAtMost, type DecimalText } from '../numbers/decimal-text.ts';
+import {
+  Exact,
+  readDecimal,
+  readWhole,
+  toAtMost,
+  type DecimalText,
+} from '../numbers/decimal-text.ts';
 import { formatFootage } from '../units/footage.ts';
 import { chooseLots, type FreeLot, type LotTake } from './choose-lots.ts';
 
@@ -6,7 +12,7 @@ import { chooseLots, type FreeLot, type LotTake } from './choose-lots.ts';
 export interface CheckInput {
   leather: { name: string; neededAreaMm2: DecimalText; lots: FreeLot[] } | null;
   hardware: { name: string; needed: number; free: number }[];
-  /** strikesLeft: null where a tool's life is not counted; free: false while it is not in the shop */
+  /** strikesLeft is null where a tool's life is not counted */
   tooling: { name: string; inShop: boolean; strikesNeeded: number; strikesLeft: number | null }[];
   /** bench minutes until the day; null where no day is asked for */
   hours: { day: string; neededMinutes: DecimalText; freeMinutes: DecimalText } | null;
@@ -82,7 +88,14 @@ function toolingAnswer(tool: CheckInput['tooling'][number], at: number): Answer 
   const free = tool.inShop ? readWhole(life, `tooling.${at}.strikesLeft`) : 0;
   const result = figures(String(tool.strikesNeeded), String(free), 0);
   const ok = result.ok && tool.inShop;
-  return { about: 'tooling', name: tool.name, unit: 'strike', ...result, ok, sentence: toolSentence(tool, ok) };
+  return {
+    about: 'tooling',
+    name: tool.name,
+    unit: 'strike',
+    ...result,
+    ok,
+    sentence: toolSentence(tool, ok),
+  };
 }
 
 function toolSentence(tool: CheckInput['tooling'][number], ok: boolean): string {
@@ -94,7 +107,11 @@ function toolSentence(tool: CheckInput['tooling'][number], ok: boolean): string 
   return `${tool.name}: ready, ${tool.strikesLeft} strikes left in it.`;
 }
 
-function hoursAnswer({ day, neededMinutes, freeMinutes }: NonNullable<CheckInput['hours']>): Answer {
+function hoursAnswer({
+  day,
+  neededMinutes,
+  freeMinutes,
+}: NonNullable<CheckInput['hours']>): Answer {
   readDecimal(neededMinutes, 'hours.neededMinutes', { min: 0 });
   readDecimal(freeMinutes, 'hours.freeMinutes', { min: 0 });
   const result = figures(neededMinutes, freeMinutes, 4);

@@ -47,7 +47,9 @@ function fewest(oldestFirst: FreeLot[], needed: Decimal): FreeLot[] {
 
 /** How many of the largest lots hold an area; null where all together do not. */
 function leastCount(lots: readonly FreeLot[], needed: Decimal): number | null {
-  const largestFirst = lots.map((lot) => new Exact(lot.freeAreaMm2)).sort((a, b) => b.comparedTo(a));
+  const largestFirst = lots
+    .map((lot) => new Exact(lot.freeAreaMm2))
+    .sort((a, b) => b.comparedTo(a));
   let [left, count] = [needed, 0];
   for (const area of largestFirst) {
     if (left.lte(0)) break;

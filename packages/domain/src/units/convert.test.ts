@@ -7,9 +7,9 @@ const areas: Unit[] = ['ft2', 'dm2', 'm2', 'mm2'];
 
 describe('convert', () => {
   it('comes back to the same value, whatever the unit between', () => {
-    const pair = fc.constantFrom(lengths, areas).chain((kind) =>
-      fc.tuple(fc.constantFrom(...kind), fc.constantFrom(...kind)),
-    );
+    const pair = fc
+      .constantFrom(lengths, areas)
+      .chain((kind) => fc.tuple(fc.constantFrom(...kind), fc.constantFrom(...kind)));
     fc.assert(
       fc.property(pair, fc.integer({ min: 0, max: 1e9 }), ([from, to], value) => {
         const back = convert(convert(value, from, to), to, from);

@@ -15,9 +15,12 @@ describe('parseFootage', () => {
     expect(parseFootage(text).toFixed()).toBe(ft2);
   });
 
-  it.each(['', '24/3', '24⁴', '24.', '-3', '24 3/5', '24 3/2', '24,75', '24.5³', 'NaN', '1e3'])('refuses "%s"', (text) => {
-    expect(() => parseFootage(text)).toThrow('Write the footage as 24.75, 24³ or 24 3/4.');
-  });
+  it.each(['', '24/3', '24⁴', '24.', '-3', '24 3/5', '24 3/2', '24,75', '24.5³', 'NaN', '1e3'])(
+    'refuses "%s"',
+    (text) => {
+      expect(() => parseFootage(text)).toThrow('Write the footage as 24.75, 24³ or 24 3/4.');
+    },
+  );
 });
 
 describe('formatFootage', () => {

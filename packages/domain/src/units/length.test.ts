@@ -16,9 +16,12 @@ describe('parseLength', () => {
     expect(parseLength(text, unit).toFixed()).toBe(mm);
   });
 
-  it.each(['', '4 3', '-4', '4,5', '1e2', 'NaN', '3/', '4 3/8/2', '5 cm'])('refuses "%s"', (text) => {
-    expect(() => parseLength(text, 'in')).toThrow('Write the length in inches');
-  });
+  it.each(['', '4 3', '-4', '4,5', '1e2', 'NaN', '3/', '4 3/8/2', '5 cm'])(
+    'refuses "%s"',
+    (text) => {
+      expect(() => parseLength(text, 'in')).toThrow('Write the length in inches');
+    },
+  );
 
   it('refuses a fraction over zero', () => {
     expect(() => parseLength('3/0', 'mm')).toThrow('cannot be over 0');

@@ -16,7 +16,13 @@ const plan: WorkPlan = {
   kind: 'steps',
   steps: [
     step({ name: 'Case', per: 'panel', secondsPerUnit: '120' }),
-    step({ name: 'Strike', per: 'strike', secondsPerUnit: '30', setupMinutes: '10', rejectPercent: '10' }),
+    step({
+      name: 'Strike',
+      per: 'strike',
+      secondsPerUnit: '30',
+      setupMinutes: '10',
+      rejectPercent: '10',
+    }),
     step({ name: 'Cut', secondsPerUnit: '6', rejectPercent: '5' }),
     step({ name: 'Clear up', per: 'run', secondsPerUnit: '900' }),
   ],
@@ -38,14 +44,17 @@ describe('benchMinutes', () => {
   it('takes minutes per 100 as they are', () => {
     const simple: WorkPlan = { kind: 'minutesPer100', minutes: '150', rejectPercent: '10' };
     expect(benchMinutes(simple, { pieces: 20, containers: 1 }).total).toBe('30');
-    expect(ticketSteps(simple)).toEqual([step({ name: 'Make', secondsPerUnit: '90', rejectPercent: '10' })]);
+    expect(ticketSteps(simple)).toEqual([
+      step({ name: 'Make', secondsPerUnit: '90', rejectPercent: '10' }),
+    ]);
     expect(goodShare(simple)).toBe(0.9);
   });
 
   it('never takes less for more pieces', () => {
     fc.assert(
       fc.property(fc.nat(5000), fc.nat(500), (pieces, more) => {
-        const minutes = (count: number) => Number(benchMinutes(plan, { pieces: count, containers: 3 }).total);
+        const minutes = (count: number) =>
+          Number(benchMinutes(plan, { pieces: count, containers: 3 }).total);
         expect(minutes(pieces + more)).toBeGreaterThanOrEqual(minutes(pieces));
       }),
     );

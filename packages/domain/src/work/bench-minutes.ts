@@ -1,5 +1,11 @@
 import type { Decimal } from 'decimal.js';
-import { type DecimalText, Exact, readDecimal, readWhole, toAtMost } from '../numbers/decimal-text.ts';
+import {
+  type DecimalText,
+  Exact,
+  readDecimal,
+  readWhole,
+  toAtMost,
+} from '../numbers/decimal-text.ts';
 import { ticketSteps, type WorkPlan, type WorkStep } from './work-plan.ts';
 
 export interface StepMinutes {

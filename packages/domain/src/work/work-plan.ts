@@ -64,6 +64,9 @@ function checkStep(step: WorkStep, at: number): void {
 
 function checkRejects(percent: DecimalText, field: string): void {
   if (readDecimal(percent, field, { min: 0, max: 100 }).eq(100)) {
-    throw new InvalidInput(field, 'If every piece fails, there is nothing to sell: write less than 100 %.');
+    throw new InvalidInput(
+      field,
+      'If every piece fails, there is nothing to sell: write less than 100 %.',
+    );
   }
 }

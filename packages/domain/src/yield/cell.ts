@@ -35,7 +35,11 @@ export interface Fit {
 }
 
 /** The positions k for which start + k × period lies within 0 … free. */
-export function positions(start: number, period: number, free: number): { first: number; count: number } {
+export function positions(
+  start: number,
+  period: number,
+  free: number,
+): { first: number; count: number } {
   const tiny = 1e-6 / period;
   const first = Math.ceil(-start / period - tiny);
   const last = Math.floor((free - start) / period + tiny);

@@ -6,7 +6,11 @@ import { layOut } from './lay-out.ts';
 import type { LayoutInput } from './layout.ts';
 import { layoutFaults } from './layout-faults.ts';
 
-const panel = (widthMm: number, heightMm: number) => ({ form: 'panel' as const, widthMm, heightMm });
+const panel = (widthMm: number, heightMm: number) => ({
+  form: 'panel' as const,
+  widthMm,
+  heightMm,
+});
 const round = (diameterMm: number): Outline => ({ shape: 'round', diameterMm });
 const luggageTag: Outline = {
   shape: 'tag',
@@ -24,7 +28,9 @@ const aPanelInput: fc.Arbitrary<LayoutInput> = fc.record({
   outline: anOutline,
   spacingMm: halves(0, 6),
   trimMm: halves(0, 5),
-  container: fc.tuple(halves(40, 330), halves(40, 280)).map(([width, height]) => panel(width, height)),
+  container: fc
+    .tuple(halves(40, 330), halves(40, 280))
+    .map(([width, height]) => panel(width, height)),
 });
 
 describe('a layout on a panel', { timeout: 300_000 }, () => {
@@ -72,14 +78,29 @@ describe('a layout on a panel', { timeout: 300_000 }, () => {
   });
 
   it('gives an honest zero where the outline does not fit', () => {
-    const layout = layOut({ outline: round(95), spacingMm: 3, trimMm: 3, container: panel(100, 200) });
-    expect(layout).toMatchObject({ pieces: 0, placements: [], yieldPercent: '0', areaPerPieceMm2: null });
+    const layout = layOut({
+      outline: round(95),
+      spacingMm: 3,
+      trimMm: 3,
+      container: panel(100, 200),
+    });
+    expect(layout).toMatchObject({
+      pieces: 0,
+      placements: [],
+      yieldPercent: '0',
+      areaPerPieceMm2: null,
+    });
   });
 
   it('fills a panel that rectangles divide evenly', () => {
     const outline: Outline = { shape: 'rectangle', widthMm: 20, heightMm: 10, cornerRadiusMm: 0 };
     const layout = layOut({ outline, spacingMm: 0, trimMm: 0, container: panel(200, 100) });
-    expect(layout).toMatchObject({ pieces: 100, yieldPercent: '100', boundPieces: 100, turned: 'none' });
+    expect(layout).toMatchObject({
+      pieces: 100,
+      yieldPercent: '100',
+      boundPieces: 100,
+      turned: 'none',
+    });
   });
 
   // Common practice, no source: a small article that nests by turning every other one gives about
@@ -140,7 +161,9 @@ describe('a layout on a strip', { timeout: 300_000 }, () => {
     const perPiece = layOut(input).mmPerPiece ?? 0;
     const long = layOut({ ...input, container: { ...strip(130), lengthMm: 3000 } });
     expect(long.pieces).toBeGreaterThanOrEqual(Math.floor((3000 - 250) / perPiece));
-    expect(layoutFaults({ ...input, container: { ...strip(130), lengthMm: 3000 } }, long)).toEqual([]);
+    expect(layoutFaults({ ...input, container: { ...strip(130), lengthMm: 3000 } }, long)).toEqual(
+      [],
+    );
   });
 
   it('gives zero where the outline is wider than the strip', () => {

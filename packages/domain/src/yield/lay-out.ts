@@ -1,4 +1,4 @@
-import { Exact, toAtMost, toText } from '../numbers/decimal-text.ts';
+import { Exact, toAtMost } from '../numbers/decimal-text.ts';
 import { outlineArea } from '../outline/measure.ts';
 import { outlinePolygon } from '../outline/polygon.ts';
 import { bestRows, type Area, type Found } from './best-rows.ts';

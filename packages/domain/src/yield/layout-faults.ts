@@ -61,10 +61,7 @@ function box(piece: readonly Point[]): Box {
 }
 
 const boxGap = (a: Box, b: Box): number =>
-  Math.hypot(
-    Math.max(0, a[0] - b[2], b[0] - a[2]),
-    Math.max(0, a[1] - b[3], b[1] - a[3]),
-  );
+  Math.hypot(Math.max(0, a[0] - b[2], b[0] - a[2]), Math.max(0, a[1] - b[3], b[1] - a[3]));
 
 /** Distance of two polygons; below zero, by the depth of the deepest corner, where they overlap. */
 function distance(a: readonly Point[], b: readonly Point[]): number {
@@ -88,7 +85,10 @@ function toEdges(point: Point, polygon: readonly Point[]): number {
     const [dx, dy] = [to.x - from.x, to.y - from.y];
     const along = ((point.x - from.x) * dx + (point.y - from.y) * dy) / (dx * dx + dy * dy);
     const share = Math.min(1, Math.max(0, along));
-    least = Math.min(least, Math.hypot(point.x - from.x - share * dx, point.y - from.y - share * dy));
+    least = Math.min(
+      least,
+      Math.hypot(point.x - from.x - share * dx, point.y - from.y - share * dy),
+    );
   });
   return least;
 }

@@ -26,16 +26,20 @@ export function* rowCells(piece: Piece, room: Room, halfTurnMatters: boolean): G
   if (halfTurnMatters) yield* everyOtherRowTurned(piece, room);
 }
 
-function* straightAndShifted(
-  piece: Piece,
-  room: Room,
-  halfTurnMatters: boolean,
-): Generator<Cell> {
+function* straightAndShifted(piece: Piece, room: Room, halfTurnMatters: boolean): Generator<Cell> {
   const least = piece.beside(0, 0, 0);
-  const fractions = halfTurnMatters ? range(0, shiftSteps / 2).map((at) => at / shiftSteps) : [0, 0.5];
+  const fractions = halfTurnMatters
+    ? range(0, shiftSteps / 2).map((at) => at / shiftSteps)
+    : [0, 0.5];
   for (const fraction of fractions) {
     for (const period of periods(least, piece, room, fraction)) {
-      yield stack(piece, { members: [alone(0)], period }, { members: [alone(0)], period }, fraction * period, 'none');
+      yield stack(
+        piece,
+        { members: [alone(0)], period },
+        { members: [alone(0)], period },
+        fraction * period,
+        'none',
+      );
     }
   }
 }
@@ -71,7 +75,9 @@ export function pairCells(piece: Piece): Cell[] {
   const lifts = [...coarse, ...refinements.map((by) => best + by * 2 * piece.height)];
   const straight = lifts.map((lift) => cellAt(lift, 0));
   const least = Math.min(...straight.map(areaPerPiece));
-  const promising = lifts.filter((_, at) => areaPerPiece(straight[at] as Cell) <= nearlyBest * least);
+  const promising = lifts.filter(
+    (_, at) => areaPerPiece(straight[at] as Cell) <= nearlyBest * least,
+  );
   const shifted = promising.flatMap((lift) => range(1, 7).map((at) => cellAt(lift, at / 8)));
   return [...straight, ...shifted];
 }
@@ -104,7 +110,8 @@ function periods(least: number, piece: Piece, room: Room, fraction: number): num
   const free = room.width - piece.width;
   const most = Math.floor(free / least + 1e-9) + 1;
   const shift = Math.min(fraction, 1 - fraction);
-  const spread = fraction === 0 ? [] : range(1, most).flatMap((n) => [free / (n - 1), free / (n - 1 + shift)]);
+  const spread =
+    fraction === 0 ? [] : range(1, most).flatMap((n) => [free / (n - 1), free / (n - 1 + shift)]);
   const widest = 2 * (piece.width + piece.spacing);
   return [least, ...spread.filter((period) => period > least && period <= widest)];
 }

@@ -18,7 +18,7 @@ export async function listUninvoiced(em: EntityManager): Promise<OrderToInvoice[
   >(`SELECT customer_order.id, customer_order.number, customer.name AS customer, customer_order.title,
       customer_order.quantity, customer_order.total, customer_order.state, customer_order.shipped_on
     FROM customer_order JOIN customer ON customer.id = customer_order.customer_id
-    WHERE customer_order.state IN ('packed', 'shipped') AND customer_order.total > 0
+    WHERE customer_order.state IN ('packed', 'part shipped', 'shipped') AND customer_order.total > 0
       AND NOT EXISTS (SELECT 1 FROM invoice WHERE invoice.order_id = customer_order.id AND invoice.state <> 'credited')
     ORDER BY customer_order.id`);
   return rows.map((row) => ({

@@ -1,6 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import type { CheckAnswer, Order, RunCheck } from '@hidewright/contract';
-import { agreedQuote, readyForTheBench, takenOn, type BenchShop } from '../../testing/bench-shop.ts';
+import { agreedQuote, readyForTheBench, setBenchHours, takenOn, type BenchShop } from '../../testing/bench-shop.ts';
 import { draftQuote } from '../../testing/example-quote.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 
@@ -21,6 +21,11 @@ async function check(quoteId: number, query = ''): Promise<RunCheck> {
 
 const answerAbout = (answers: CheckAnswer[], about: CheckAnswer['about']) => answers.find((each) => each.about === about);
 
+async function changeTool(id: number, change: object): Promise<void> {
+  const { version } = (await as('owner').get(`/api/tools/${id}`).expect(200)).body as { version: number };
+  await as('owner').patch(`/api/tools/${id}`).set('If-Match', `"${version}"`).send(change).expect(200);
+}
+
 describe('Can we make it?', () => {
   it('says yes, and from which lot, when all is there', async () => {
     const quote = await agreedQuote(ready);
@@ -39,6 +44,7 @@ describe('Can we make it?', () => {
 
   it('names exactly what is short, and what to do about it', async () => {
     const quote = await draftQuote(ready);
+    await setBenchHours(ready, '2');
     const { yes, answers } = await check(quote.id, '?quantity=250&by=2026-12-02');
     expect(yes).toBe(false);
     const hardware = answerAbout(answers, 'hardware');
@@ -60,16 +66,27 @@ describe('Can we make it?', () => {
 
   it('misses a plate that is on order, and one that is worn out', async () => {
     const quote = await agreedQuote(ready);
-    const plate = (change: object) =>
-      as('owner').get(`/api/tools/${ready.plateId}`).then(({ body }) =>
-        as('owner').patch(`/api/tools/${ready.plateId}`).set('If-Match', `"${(body as { version: number }).version}"`).send(change).expect(200),
-      );
-    await plate({ state: 'on order' });
+    await changeTool(ready.plateId, { state: 'scrapped' });
+    const plate = { kind: 'stamp plate', name: 'Bramble', metal: 'magnesium', number: '42', cost: '48.00', patternId: ready.patternId, state: 'on order' };
+    const ordered = await as('owner').post('/api/tools').send({ ...plate, lifeUses: 10 }).expect(201);
     expect((await check(quote.id)).answers.find(({ name }) => name === 'Stamp plate')?.sentence).toBe(
-      'Stamp plate: not in the shop yet. Number 41 is on order: take the run on awaiting tooling, and note when it is here.',
+      'Stamp plate: not in the shop yet. Number 42 is on order: take the run on awaiting tooling, and note when it is here.',
     );
-    await plate({ state: 'on the rack', lifeUses: 10 });
+    await changeTool(ordered.body.id, { state: 'on the rack' });
     expect(answerAbout((await check(quote.id)).answers, 'tooling')).toMatchObject({ enough: false, free: '10' });
+  });
+
+  it('takes a run on awaiting tooling, and racks the plate when it is here', async () => {
+    const quote = await agreedQuote(ready);
+    await changeTool(ready.plateId, { state: 'scrapped' });
+    const plate = { kind: 'stamp plate', name: 'Bramble', metal: 'copper', cost: '90.00', patternId: ready.patternId, state: 'on order' };
+    const ordered = await as('owner').post('/api/tools').send({ ...plate, lifeUses: 5_000 }).expect(201);
+    await takeOn(quote.id).expect(409);
+    const order = (await takeOn(quote.id, { awaits: ['tooling'] }).expect(201)).body as Order;
+    expect(order).toMatchObject({ state: 'awaiting tooling', job: { state: 'waiting' } });
+    const here = await as('owner').post(`/api/orders/${order.id}/arrivals`).send({ what: 'tooling' }).expect(201);
+    expect(here.body).toMatchObject({ state: 'taken on', job: { state: 'ready' } });
+    expect((await as('maker').get(`/api/tools/${ordered.body.id}`)).body).toMatchObject({ state: 'on the rack' });
   });
 
   it('carries no price to the maker, and refuses a day that is over', async () => {

@@ -123,7 +123,7 @@ export const sources: Source[] = [
     say: (row) => ({
       kind: 'invoice',
       title: 'Invoice',
-      detail: `${row.title} for ${row.customer}, ${row.number}`,
+      detail: `${row.number}: ${row.title} for ${row.customer}`,
       when: by('shipped', row.day),
       late: false,
       action: 'Invoice',
@@ -154,7 +154,7 @@ export const sources: Source[] = [
     say: (row, today) => ({
       kind: 'answer',
       title: 'Answer',
-      detail: `${row.title} for ${row.customer}, ${row.number}`,
+      detail: `${row.number}: ${row.title} for ${row.customer}`,
       when: by('in hands', row.day),
       late: past(row.day, today),
       action: 'Quote',

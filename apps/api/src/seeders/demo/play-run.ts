@@ -126,7 +126,7 @@ async function takeOn({ shop, year, furnished }: Stage, played: Played): Promise
     if (plateToOrder) await orderPlate(work, { run, customerId, patternId });
     const order = await takeOnOrder(work, {
       quoteId,
-      promisedOn: year.day(run.daysBefore - run.weeks * 7 + 4),
+      promisedOn: addWorkdays(year.day(run.daysBefore), run.weeks * 5 - 3),
       awaits: plateToOrder ? ['proof', 'tooling'] : [],
       evenIfShort: false,
     });

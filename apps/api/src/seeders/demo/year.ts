@@ -17,7 +17,7 @@ export class Year {
 
   /** The working day so many days before the end; a weekend's things happen on the Friday before. */
   day(daysBefore: number): string {
-    const day = addDays(this.end, -Math.max(0, daysBefore));
+    const day = addDays(this.end, -daysBefore);
     const back = Math.max(0, weekday(day) - 5);
     return addDays(day, -back);
   }

@@ -1,9 +1,97 @@
 import type { RouteObject } from 'react-router-dom';
 
+const nameOf = (thing: unknown) => (thing as { name: string }).name;
+const tagOf = (lot: unknown) => (lot as { tag: string }).tag;
+const numberOf = (order: unknown) => (order as { number: string }).number;
+
 export const stockroomRoutes: RouteObject[] = [
   {
     path: '/stockroom',
     handle: { crumb: 'Stockroom' },
-    children: [{ index: true, lazy: () => import('./stockroom/index.tsx') }],
+    children: [
+      { index: true, lazy: () => import('./stockroom/index.tsx') },
+      {
+        path: 'receive',
+        handle: { crumb: 'Receive' },
+        lazy: () => import('./stockroom/receive.tsx'),
+      },
+      {
+        path: 'leather',
+        handle: { crumb: 'Leather' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/leathers.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./stockroom/new-leather.tsx'),
+          },
+          { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./stockroom/leather.tsx') },
+        ],
+      },
+      {
+        path: 'lots',
+        handle: { crumb: 'Lots' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/lots.tsx') },
+          { path: ':id', handle: { crumb: tagOf }, lazy: () => import('./stockroom/lot.tsx') },
+        ],
+      },
+      {
+        path: 'hardware',
+        handle: { crumb: 'Hardware and supplies' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/hardware-list.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./stockroom/new-hardware.tsx'),
+          },
+          {
+            path: ':id',
+            handle: { crumb: nameOf },
+            lazy: () => import('./stockroom/hardware.tsx'),
+          },
+        ],
+      },
+      {
+        path: 'suppliers',
+        handle: { crumb: 'Suppliers' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/suppliers.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./stockroom/new-supplier.tsx'),
+          },
+          {
+            path: ':id',
+            handle: { crumb: nameOf },
+            lazy: () => import('./stockroom/supplier.tsx'),
+          },
+        ],
+      },
+      {
+        path: 'purchase-orders',
+        handle: { crumb: 'Purchase orders' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/purchase-orders.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./stockroom/new-purchase-order.tsx'),
+          },
+          {
+            path: ':id',
+            handle: { crumb: numberOf },
+            lazy: () => import('./stockroom/purchase-order.tsx'),
+          },
+          {
+            path: ':id/change',
+            handle: { crumb: numberOf },
+            lazy: () => import('./stockroom/change-purchase-order.tsx'),
+          },
+        ],
+      },
+    ],
   },
 ];

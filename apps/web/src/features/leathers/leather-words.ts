@@ -2,7 +2,10 @@ import type { Leather } from '@hidewright/contract';
 import { numberText } from '../../lib/formatting.ts';
 
 /** 5–6 oz; empty where no weight was given. */
-export function weightText({ weightLowOz, weightHighOz }: Pick<Leather, 'weightLowOz' | 'weightHighOz'>): string {
+export function weightText({
+  weightLowOz,
+  weightHighOz,
+}: Pick<Leather, 'weightLowOz' | 'weightHighOz'>): string {
   if (weightLowOz === null) return '';
   const low = numberText(weightLowOz, 3);
   const high = weightHighOz === null ? low : numberText(weightHighOz, 3);

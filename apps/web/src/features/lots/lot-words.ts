@@ -3,7 +3,10 @@ import { countText, sizeText } from '../../lib/formatting.ts';
 import type { LengthUnit } from '../../lib/units.ts';
 
 /** side; 12 panels, 11 × 13 in */
-export function formText(lot: Pick<Lot, 'form' | 'pieces' | 'widthMm' | 'heightMm'>, unit: LengthUnit): string {
+export function formText(
+  lot: Pick<Lot, 'form' | 'pieces' | 'widthMm' | 'heightMm'>,
+  unit: LengthUnit,
+): string {
   const { form, pieces, widthMm, heightMm } = lot;
   const word = pieces === 1 ? form : `${countText(pieces)} ${pluralOf(form)}`;
   const size = widthMm !== null && heightMm !== null ? sizeText(widthMm, heightMm, unit) : '';

@@ -12,7 +12,10 @@ export function lotsQuery(wanted: Wanted = {}) {
   return infiniteQueryOptions({
     queryKey: ['lots', 'list', wanted],
     queryFn: ({ signal, pageParam }) =>
-      call(listLots, { query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) }, signal }),
+      call(listLots, {
+        query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
   });

@@ -1,8 +1,9 @@
-import { PageHeader } from '../../../components/page-header.tsx';
-import { RouteError } from '../../../components/route-error.tsx';
+import { redirect } from 'react-router-dom';
 
-export function Component() {
-  return <PageHeader title="Books" />;
+export function loader() {
+  return redirect('/books/invoices');
 }
 
-export const ErrorBoundary = RouteError;
+export function Component() {
+  return null;
+}

@@ -18,7 +18,6 @@ export async function loader() {
 
 export function Component() {
   const { data: today } = useSuspenseQuery(todayQuery());
-  const below = [today.owed, today.earned, today.short].some((part) => part !== null && part !== undefined);
   return (
     <>
       <PageHeader title={longDayText(today.day)} />
@@ -29,19 +28,16 @@ export function Component() {
           </h2>
           <ToDoList toDos={today.now} today={today.day} />
         </section>
-        {today.fourWeeks && <FourWeeks weeks={today.fourWeeks} />}
-        {!today.fourWeeks && today.owed && <Owed owed={today.owed} />}
-      </div>
-      {today.fourWeeks && below && (
-        <>
-          <Stitch className="my-5" />
-          <div className="grid items-start gap-5 md:grid-cols-2 xl:grid-cols-3">
+        <div className="space-y-5">
+          {today.fourWeeks && <FourWeeks weeks={today.fourWeeks} />}
+          {today.fourWeeks && today.owed && <Stitch />}
+          <div className="grid items-start gap-5 xl:grid-cols-2">
             {today.owed && <Owed owed={today.owed} />}
             {today.earned && <EarnedHours earned={today.earned} today={today.day} />}
             {today.short && <RunsShort short={today.short} />}
           </div>
-        </>
-      )}
+        </div>
+      </div>
     </>
   );
 }

@@ -45,6 +45,14 @@ export function ChangeHardwareForm({ hardware, suppliers }: ChangeHardwareFormPr
   );
 }
 
-function typedOf({ name, kind, unitPrice = '', packSize, reorderAt, supplierId, active }: Hardware) {
+function typedOf({
+  name,
+  kind,
+  unitPrice = '',
+  packSize,
+  reorderAt,
+  supplierId,
+  active,
+}: Hardware) {
   return { name, kind, unitPrice, packSize, reorderAt, supplierId, active };
 }

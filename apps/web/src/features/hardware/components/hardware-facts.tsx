@@ -8,7 +8,9 @@ export function HardwareFacts({ hardware }: { hardware: Hardware }) {
   const { currency } = useWorkshop();
   const { unitPrice, valueOnHand } = hardware;
   const prices = [
-    ...(unitPrice === undefined ? [] : [{ word: `Price, ${currency}`, figure: unitPriceText(unitPrice) }]),
+    ...(unitPrice === undefined
+      ? []
+      : [{ word: `Price, ${currency}`, figure: unitPriceText(unitPrice) }]),
     ...(valueOnHand === undefined
       ? []
       : [{ word: `On hand at cost, ${currency}`, figure: moneyText(valueOnHand) }]),

@@ -8,7 +8,11 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
-const counted = (id: string, header: string, value: (row: Hardware) => number): Column<Hardware> => ({
+const counted = (
+  id: string,
+  header: string,
+  value: (row: Hardware) => number,
+): Column<Hardware> => ({
   id,
   header,
   value,
@@ -31,7 +35,8 @@ function pricesIn(currency: string): Column<Hardware>[] {
       value: (row) => row.valueOnHand,
       cell: (row) => row.valueOnHand !== undefined && moneyText(row.valueOnHand),
       align: 'right',
-      total: (rows) => moneyText(Decimal.sum(0, ...rows.map((row) => row.valueOnHand ?? '0')).toFixed()),
+      total: (rows) =>
+        moneyText(Decimal.sum(0, ...rows.map((row) => row.valueOnHand ?? '0')).toFixed()),
     },
   ];
 }

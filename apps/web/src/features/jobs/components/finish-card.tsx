@@ -30,7 +30,7 @@ export function FinishCard({ job }: { job: Job }) {
         schema={finishJob.body}
         draftKey={`finish-${job.id}`}
         defaults={{
-          good: last === undefined || last.good === 0 ? undefined : last.good,
+          ...(last !== undefined && last.good > 0 && { good: last.good }),
           seconds: last?.seconds ?? 0,
           leatherLeft: leather.map(({ lotId }) => ({ lotId, areaMm2: '0' })),
           hardwareLeft: hardware.map(({ hardwareId }) => ({ hardwareId, quantity: 0 })),

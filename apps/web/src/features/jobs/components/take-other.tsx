@@ -62,7 +62,7 @@ function TakeLeather({ job, onDone }: TakeProps) {
   return (
     <Form
       schema={leatherTaking}
-      defaults={{ lotId: job.lots[0]?.lotId, areaMm2: '' }}
+      defaults={{ ...(job.lots[0] && { lotId: job.lots[0].lotId }), areaMm2: '' }}
       onSend={async (body) => {
         await mutateAsync({ params: { id: job.id }, body });
         say('Taken from the rack.');
@@ -83,7 +83,7 @@ function TakeHardware({ job, onDone }: TakeProps) {
   return (
     <Form
       schema={hardwareTaking}
-      defaults={{ hardwareId: job.hardware[0]?.hardwareId, quantity: undefined }}
+      defaults={job.hardware[0] ? { hardwareId: job.hardware[0].hardwareId } : {}}
       onSend={async (body) => {
         await mutateAsync({ params: { id: job.id }, body });
         say('Taken from the shelf.');

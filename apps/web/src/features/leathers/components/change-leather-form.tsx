@@ -47,5 +47,15 @@ export function ChangeLeatherForm({ leather, suppliers }: ChangeLeatherFormProps
 function typedOf(leather: Leather) {
   const { name, tannage, colour, finish, weightLowOz, weightHighOz, supplierId, active } = leather;
   const pricePerFt2 = leather.pricePerFt2 ?? '';
-  return { name, pricePerFt2, tannage, colour, finish, weightLowOz, weightHighOz, supplierId, active };
+  return {
+    name,
+    pricePerFt2,
+    tannage,
+    colour,
+    finish,
+    weightLowOz,
+    weightHighOz,
+    supplierId,
+    active,
+  };
 }

@@ -12,7 +12,13 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
       <fieldset>
         <legend className="sr-only">Weight</legend>
         <div className="flex flex-wrap items-start gap-x-4 gap-y-3">
-          <DecimalField name="weightLowOz" label="Weight from" unit="oz" whenEmpty="null" optional />
+          <DecimalField
+            name="weightLowOz"
+            label="Weight from"
+            unit="oz"
+            whenEmpty="null"
+            optional
+          />
           <DecimalField name="weightHighOz" label="to" unit="oz" whenEmpty="null" optional />
         </div>
       </fieldset>

@@ -13,13 +13,19 @@ export function LotFacts({ lot }: { lot: Lot }) {
   const costs = [
     { word: `Cost, ${currency}`, figure: lot.cost },
     { word: `Left at cost, ${currency}`, figure: lot.valueOnHand },
-  ].flatMap(({ word, figure }) => (figure === undefined ? [] : [{ word, figure: moneyText(figure) }]));
+  ].flatMap(({ word, figure }) =>
+    figure === undefined ? [] : [{ word, figure: moneyText(figure) }],
+  );
   return (
     <div className="space-y-5">
       <KeyFigures
         large
         figures={[
-          { word: 'On hand', figure: area(lot.onHandAreaMm2), note: `of ${area(lot.measuredAreaMm2)} measured` },
+          {
+            word: 'On hand',
+            figure: area(lot.onHandAreaMm2),
+            note: `of ${area(lot.measuredAreaMm2)} measured`,
+          },
           { word: 'Held for jobs', figure: area(lot.reservedAreaMm2) },
           { word: 'Free', figure: area(lot.freeAreaMm2) },
         ]}
@@ -41,5 +47,9 @@ export function LotFacts({ lot }: { lot: Lot }) {
 
 function OrderLink({ lot }: { lot: Lot }) {
   if (lot.purchaseOrderId === null) return '–';
-  return <TextLink to={`/stockroom/purchase-orders/${lot.purchaseOrderId}`}>{lot.purchaseOrderNumber}</TextLink>;
+  return (
+    <TextLink to={`/stockroom/purchase-orders/${lot.purchaseOrderId}`}>
+      {lot.purchaseOrderNumber}
+    </TextLink>
+  );
 }

@@ -17,7 +17,8 @@ export function LeatherField() {
   const { currency } = useWorkshop();
   const { data: leathers = [] } = useQuery(leatherChoicesQuery());
   const [adding, setAdding] = useState(false);
-  const leather = leathers.find(({ id }) => id === Number(useWatch({ name })));
+  const chosen = Number(useWatch({ name }));
+  const leather = leathers.find(({ id }) => id === chosen);
   const price = leather?.pricePerFt2 === undefined ? '' : `${unitPriceText(leather.pricePerFt2)} ${currency} per ft²`;
   return (
     <div>

@@ -1,0 +1,93 @@
+import type { Hardware } from '@hidewright/contract';
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
+import { Card } from '../../../components/card.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
+import { PageHeader } from '../../../components/page-header.tsx';
+import { RouteError } from '../../../components/route-error.tsx';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { ChangeHardwareForm } from '../../../features/hardware/components/change-hardware-form.tsx';
+import { HardwareFacts } from '../../../features/hardware/components/hardware-facts.tsx';
+import { hardwareQuery } from '../../../features/hardware/hardware.queries.ts';
+import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
+import { HeldList } from '../../../features/stock/components/held-list.tsx';
+import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
+import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
+import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
+import { queryClient } from '../../../lib/query-client.ts';
+import { choicesOf } from './choices.ts';
+import { useRole } from './use-role.ts';
+
+export async function loader({ params }: LoaderFunctionArgs) {
+  const id = Number(params['id']);
+  const hardware = await queryClient.ensureQueryData(hardwareQuery(id));
+  await Promise.all([
+    queryClient.ensureQueryData(suppliersQuery()),
+    queryClient.ensureInfiniteQueryData(movementsQuery({ hardwareId: id })),
+    queryClient.ensureQueryData(heldQuery({ hardwareId: id })),
+  ]);
+  return hardware;
+}
+
+export function Component() {
+  const { id } = useLoaderData<Hardware>();
+  const { isOwner, handlesStock } = useRole();
+  const { data: hardware } = useSuspenseQuery(hardwareQuery(id));
+  const { data: suppliers } = useSuspenseQuery(suppliersQuery());
+  const item = { hardwareId: id };
+  return (
+    <>
+      <PageHeader
+        title={hardware.name}
+        subtitle={hardware.short ? <StateMark state="short" /> : hardware.kind}
+        action={handlesStock && <Actions id={id} isOwner={isOwner} />}
+      />
+      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)]">
+        <div className="grid gap-5">
+          <Card title="How many">
+            <HardwareFacts hardware={hardware} />
+          </Card>
+          <Card title="Movements">
+            <MovementsTable item={item} />
+          </Card>
+        </div>
+        <div className="grid gap-5">
+          <Card title="Held for jobs">
+            <HeldList item={item} mayOpenJobs={handlesStock} />
+          </Card>
+          {handlesStock && (
+            <Card title="Adjust" subtitle="to what is really there">
+              <AdjustForm key={id} item={{ of: 'hardware', hardwareId: id }} />
+            </Card>
+          )}
+          {isOwner && (
+            <Card title="Change it">
+              <ChangeHardwareForm
+                key={id}
+                hardware={hardware}
+                suppliers={choicesOf(suppliers.items)}
+              />
+            </Card>
+          )}
+        </div>
+      </div>
+    </>
+  );
+}
+
+function Actions({ id, isOwner }: { id: number; isOwner: boolean }) {
+  return (
+    <>
+      <LinkButton to={`/stockroom/receive?hardware=${id}`} tone={isOwner ? 'secondary' : 'primary'}>
+        Receive
+      </LinkButton>
+      {isOwner && (
+        <LinkButton to={`/stockroom/purchase-orders/new?hardware=${id}`} tone="primary">
+          Order it
+        </LinkButton>
+      )}
+    </>
+  );
+}
+
+export const ErrorBoundary = RouteError;

@@ -1,0 +1,80 @@
+import type { Lot } from '@hidewright/contract';
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
+import { Card } from '../../../components/card.tsx';
+import { RouteError } from '../../../components/route-error.tsx';
+import { PageTitle } from '../../../components/page-title.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { Ticket } from '../../../components/ticket.tsx';
+import { ChangeLotForm } from '../../../features/lots/components/change-lot-form.tsx';
+import { LotFacts } from '../../../features/lots/components/lot-facts.tsx';
+import { formText } from '../../../features/lots/lot-words.ts';
+import { lotQuery } from '../../../features/lots/lots.queries.ts';
+import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
+import { HeldList } from '../../../features/stock/components/held-list.tsx';
+import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
+import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
+import { queryClient } from '../../../lib/query-client.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { useRole } from './use-role.ts';
+
+export async function loader({ params }: LoaderFunctionArgs) {
+  const id = Number(params['id']);
+  const lot = await queryClient.ensureQueryData(lotQuery(id));
+  await Promise.all([
+    queryClient.ensureInfiniteQueryData(movementsQuery({ lotId: id })),
+    queryClient.ensureQueryData(heldQuery({ lotId: id })),
+  ]);
+  return lot;
+}
+
+export function Component() {
+  const { id } = useLoaderData<Lot>();
+  const { handlesStock } = useRole();
+  const { lengthUnit } = useWorkshop();
+  const { data: lot } = useSuspenseQuery(lotQuery(id));
+  const item = { lotId: id };
+  return (
+    <div className="space-y-5">
+      <PageTitle>{`Lot ${lot.tag}`}</PageTitle>
+      <Ticket
+        level={1}
+        number={lot.tag}
+        title={lot.leatherName}
+        detail={
+          <>
+            {formText(lot, lengthUnit)} ·{' '}
+            <TextLink to={`/stockroom/leather/${lot.leatherId}`}>this leather</TextLink>
+          </>
+        }
+      />
+      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)]">
+        <div className="grid gap-5">
+          <Card title="What is left">
+            <LotFacts lot={lot} />
+          </Card>
+          <Card title="Movements">
+            <MovementsTable item={item} />
+          </Card>
+        </div>
+        <div className="grid gap-5">
+          <Card title="Held for jobs">
+            <HeldList item={item} mayOpenJobs={handlesStock} />
+          </Card>
+          {handlesStock && (
+            <>
+              <Card title="Adjust" subtitle="to what is really there">
+                <AdjustForm key={id} item={{ of: 'lot', lotId: id }} />
+              </Card>
+              <Card title="Where it lies">
+                <ChangeLotForm key={id} lot={lot} />
+              </Card>
+            </>
+          )}
+        </div>
+      </div>
+    </div>
+  );
+}
+
+export const ErrorBoundary = RouteError;

@@ -1,0 +1,69 @@
+import { useNavigate, useSearchParams } from 'react-router-dom';
+import { Card } from '../../../components/card.tsx';
+import { PageHeader } from '../../../components/page-header.tsx';
+import { RouteError } from '../../../components/route-error.tsx';
+import { say } from '../../../components/toast.ts';
+import { PurchaseOrderForm } from '../../../features/purchase-orders/components/purchase-order-form.tsx';
+import { useAddPurchaseOrder } from '../../../features/purchase-orders/purchase-orders.mutations.ts';
+import {
+  blankLine,
+  blankOrder,
+  type Goods,
+  type TypedOrder,
+} from '../../../features/purchase-orders/typed-order.ts';
+import { loadOrderBasics, NoSupplier, useOrderBasics } from './order-basics.tsx';
+
+export async function loader() {
+  await loadOrderBasics();
+  return null;
+}
+
+export function Component() {
+  const navigate = useNavigate();
+  const [search] = useSearchParams();
+  const add = useAddPurchaseOrder();
+  const basics = useOrderBasics();
+  return (
+    <>
+      <PageHeader title="New purchase order" />
+      {basics.suppliers.length === 0 ? (
+        <NoSupplier />
+      ) : (
+        <Card>
+          <PurchaseOrderForm
+            {...basics}
+            defaults={startWith(search, basics)}
+            draftKey={`purchase-order-new-${search}`}
+            submitWord="Save the draft"
+            cancelTo="/stockroom/purchase-orders"
+            onSend={async (body) => {
+              const order = await add.mutateAsync({ body });
+              say(`${order.number} is drafted. Send it when it is right.`);
+              void navigate(`/stockroom/purchase-orders/${order.id}`);
+            }}
+          />
+        </Card>
+      )}
+    </>
+  );
+}
+
+/** An order that was begun from a leather, hardware or a supplier has it in it. */
+function startWith(
+  search: URLSearchParams,
+  { leathers, hardware }: { leathers: Goods[]; hardware: Goods[] },
+): Partial<TypedOrder> {
+  const named = (goods: Goods[], name: string) =>
+    goods.filter(({ id }) => String(id) === search.get(name));
+  const supplierId = Number(search.get('supplier'));
+  return {
+    ...blankOrder,
+    ...(supplierId > 0 && { supplierId }),
+    lines: [
+      ...named(leathers, 'leather').map((goods) => blankLine('leather', goods)),
+      ...named(hardware, 'hardware').map((goods) => blankLine('hardware', goods)),
+    ],
+  };
+}
+
+export const ErrorBoundary = RouteError;

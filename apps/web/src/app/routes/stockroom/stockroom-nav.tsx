@@ -1,0 +1,13 @@
+import { SectionNav, type SectionLink } from '../../../components/section-nav.tsx';
+
+const items: SectionLink[] = [
+  { to: '/stockroom/leather', word: 'Leather' },
+  { to: '/stockroom/lots', word: 'Lots' },
+  { to: '/stockroom/hardware', word: 'Hardware and supplies' },
+  { to: '/stockroom/suppliers', word: 'Suppliers' },
+  { to: '/stockroom/purchase-orders', word: 'Purchase orders' },
+];
+
+export function StockroomNav() {
+  return <SectionNav label="Stockroom" items={items} />;
+}

@@ -1,0 +1,79 @@
+import type { InvoiceSummary } from '@hidewright/contract';
+import { useMemo, type ReactNode } from 'react';
+import type { Column } from '../../../components/column.ts';
+import { DataTable } from '../../../components/data-table.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { dayText, moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
+import { InvoiceStateMark } from './invoice-state.tsx';
+import { sumMoney } from './sum-money.ts';
+
+function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
+  const day = (text: string | null) => (text === null ? '–' : dayText(text, today));
+  return [
+    {
+      id: 'number',
+      header: 'Invoice',
+      value: (row) => row.number ?? `draft for ${row.orderNumber}`,
+      cell: (row) => (
+        <TextLink to={`/books/invoices/${row.id}`}>
+          {row.number ?? `draft for ${row.orderNumber}`}
+        </TextLink>
+      ),
+      onPhone: 'title',
+    },
+    { id: 'customer', header: 'Customer', value: (row) => row.customerName },
+    { id: 'title', header: 'For', value: (row) => row.title },
+    {
+      id: 'state',
+      header: 'State',
+      value: (row) => row.state,
+      cell: (row) => <InvoiceStateMark invoice={row} />,
+    },
+    {
+      id: 'issued',
+      header: 'Issued',
+      value: (row) => row.issuedOn,
+      cell: (row) => day(row.issuedOn),
+    },
+    { id: 'due', header: 'Due', value: (row) => row.dueOn, cell: (row) => day(row.dueOn) },
+    {
+      id: 'total',
+      header: `Total, ${currency}`,
+      value: (row) => row.total,
+      cell: (row) => moneyText(row.total),
+      align: 'right',
+      total: (rows) => sumMoney(rows.map((row) => row.total)),
+    },
+    {
+      id: 'open',
+      header: 'Open',
+      value: (row) => row.open,
+      cell: (row) => moneyText(row.open),
+      align: 'right',
+      total: (rows) => sumMoney(rows.filter((row) => row.state !== 'draft').map((row) => row.open)),
+    },
+  ];
+}
+
+interface InvoicesTableProps {
+  rows: readonly InvoiceSummary[];
+  empty: ReactNode;
+  after?: ReactNode;
+}
+
+export function InvoicesTable({ rows, empty, after }: InvoicesTableProps) {
+  const workshop = useWorkshop();
+  const columns = useMemo(() => columnsFor(workshop), [workshop]);
+  return (
+    <DataTable
+      label="Invoices"
+      rows={rows}
+      rowId={(row) => row.id}
+      columns={columns}
+      empty={empty}
+      filterLabel="Filter invoices"
+      after={after}
+    />
+  );
+}

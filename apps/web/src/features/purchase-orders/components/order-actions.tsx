@@ -1,0 +1,42 @@
+import type { PurchaseOrder } from '@hidewright/contract';
+import { useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
+import { CancelOrderDialog } from './cancel-order-dialog.tsx';
+import { SendOrderDialog } from './send-order-dialog.tsx';
+
+interface OrderActionsProps {
+  order: PurchaseOrder;
+  isOwner: boolean;
+  mayReceive: boolean;
+}
+
+/** What the order's state allows now. */
+export function OrderActions({ order, isOwner, mayReceive }: OrderActionsProps) {
+  const [asking, setAsking] = useState<'send' | 'cancel'>();
+  const { id, state } = order;
+  const close = () => setAsking(undefined);
+  const awaited = state === 'sent' || state === 'part received';
+  return (
+    <>
+      {isOwner && state === 'draft' && (
+        <>
+          <LinkButton to={`/stockroom/purchase-orders/${id}/change`}>Change</LinkButton>
+          <Button tone="primary" onClick={() => setAsking('send')}>
+            Send
+          </Button>
+        </>
+      )}
+      {isOwner && (state === 'draft' || state === 'sent') && (
+        <Button onClick={() => setAsking('cancel')}>Cancel</Button>
+      )}
+      {mayReceive && awaited && (
+        <LinkButton tone="primary" to={`/stockroom/receive?order=${id}`}>
+          Receive
+        </LinkButton>
+      )}
+      <SendOrderDialog order={order} open={asking === 'send'} onOpenChange={close} />
+      <CancelOrderDialog order={order} open={asking === 'cancel'} onOpenChange={close} />
+    </>
+  );
+}

@@ -1,0 +1,49 @@
+import { Plus } from 'lucide-react';
+import { useFieldArray, useWatch } from 'react-hook-form';
+import { Button } from '../../../components/button.tsx';
+import { moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { amountOf, blankLine, type Goods, type TypedLine } from '../typed-order.ts';
+import { OrderLine } from './order-line.tsx';
+
+interface OrderLinesProps {
+  leathers: readonly Goods[];
+  hardware: readonly Goods[];
+}
+
+/** What is ordered, line by line, and what it comes to. */
+export function OrderLines({ leathers, hardware }: OrderLinesProps) {
+  const { fields, append, remove } = useFieldArray({ name: 'lines' });
+  const { currency } = useWorkshop();
+  const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
+  const add = (of: TypedLine['of']) =>
+    append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
+  return (
+    <fieldset>
+      <legend className="mb-3 text-lg font-semibold">What to order</legend>
+      <div className="space-y-5">
+        {fields.map((field, at) => (
+          <OrderLine
+            key={field.id}
+            at={at}
+            of={lines[at]?.of ?? 'hardware'}
+            goods={lines[at]?.of === 'leather' ? leathers : hardware}
+            onRemove={() => remove(at)}
+          />
+        ))}
+      </div>
+      <div className="mt-2 -ml-3 flex flex-wrap">
+        <Button tone="quiet" onClick={() => add('leather')}>
+          <Plus size={18} aria-hidden="true" /> Leather
+        </Button>
+        <Button tone="quiet" onClick={() => add('hardware')}>
+          <Plus size={18} aria-hidden="true" /> Hardware or supplies
+        </Button>
+      </div>
+      <p className="mt-3 font-semibold">
+        Together {currency} {moneyText(amountOf(lines))}
+        <span className="font-normal text-ink-soft">, before carriage and tax</span>
+      </p>
+    </fieldset>
+  );
+}

@@ -1,0 +1,16 @@
+import type { PurchaseOrder } from '@hidewright/contract';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+
+/** The order's state, and whether it should have been here. */
+export function OrderState({ order }: { order: PurchaseOrder }) {
+  const { today } = useWorkshop();
+  const awaited = order.state === 'sent' || order.state === 'part received';
+  const late = awaited && order.expectedOn !== null && order.expectedOn < today;
+  return (
+    <span className="inline-flex flex-wrap gap-1.5">
+      <StateMark state={order.state} />
+      {late && <StateMark state="late" />}
+    </span>
+  );
+}

@@ -1,0 +1,67 @@
+import type { PurchaseOrder } from '@hidewright/contract';
+import { useMemo, type ReactNode } from 'react';
+import type { Column } from '../../../components/column.ts';
+import { DataTable } from '../../../components/data-table.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { dayText, moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
+import { OrderState } from './order-state.tsx';
+
+const whatOf = (order: PurchaseOrder) => order.lines.map((line) => line.name).join(', ');
+
+function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<PurchaseOrder>[] {
+  const total: Column<PurchaseOrder> = {
+    id: 'total',
+    header: `Total, ${currency}`,
+    value: (row) => row.total,
+    cell: (row) => row.total !== undefined && moneyText(row.total),
+    align: 'right',
+  };
+  return [
+    {
+      id: 'number',
+      header: 'Order',
+      value: (row) => row.number,
+      cell: (row) => <TextLink to={`/stockroom/purchase-orders/${row.id}`}>{row.number}</TextLink>,
+      onPhone: 'title',
+    },
+    { id: 'supplier', header: 'Supplier', value: (row) => row.supplierName },
+    { id: 'what', header: 'What', value: whatOf },
+    {
+      id: 'state',
+      header: 'State',
+      value: (row) => row.state,
+      cell: (row) => <OrderState order={row} />,
+    },
+    {
+      id: 'expected',
+      header: 'Expected',
+      value: (row) => row.expectedOn,
+      cell: (row) => row.expectedOn !== null && dayText(row.expectedOn, today),
+    },
+    ...(withPrices ? [total] : []),
+  ];
+}
+
+interface PurchaseOrdersTableProps {
+  rows: readonly PurchaseOrder[];
+  empty: ReactNode;
+  after?: ReactNode;
+}
+
+export function PurchaseOrdersTable({ rows, empty, after }: PurchaseOrdersTableProps) {
+  const workshop = useWorkshop();
+  const withPrices = rows.some((row) => row.total !== undefined);
+  const columns = useMemo(() => columnsFor(workshop, withPrices), [workshop, withPrices]);
+  return (
+    <DataTable
+      label="Purchase orders"
+      rows={rows}
+      rowId={(row) => row.id}
+      columns={columns}
+      empty={empty}
+      filterLabel="Filter purchase orders"
+      after={after}
+    />
+  );
+}

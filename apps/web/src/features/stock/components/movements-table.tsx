@@ -1,0 +1,76 @@
+import type { StockMovement } from '@hidewright/contract';
+import { useInfiniteQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
+import { Button } from '../../../components/button.tsx';
+import type { Column } from '../../../components/column.ts';
+import { DataTable } from '../../../components/data-table.tsx';
+import { EmptyState } from '../../../components/empty-state.tsx';
+import { instantText, moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
+import { movementWords, signedText } from '../movement-words.ts';
+import { movementsQuery, type Item } from '../stock.queries.ts';
+
+function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMovement>[] {
+  const { areaUnit, currency, timeZone } = workshop;
+  const value: Column<StockMovement> = {
+    id: 'value',
+    header: `At cost, ${currency}`,
+    value: (row) => row.value,
+    cell: (row) => row.value !== undefined && moneyText(row.value),
+    align: 'right',
+  };
+  return [
+    {
+      id: 'at',
+      header: 'When',
+      value: (row) => row.at,
+      cell: (row) => instantText(row.at, timeZone),
+      onPhone: 'title',
+    },
+    { id: 'kind', header: 'What', value: (row) => movementWords[row.kind] },
+    {
+      id: 'quantity',
+      header: 'How much',
+      value: (row) => row.areaMm2 ?? row.quantity,
+      cell: (row) => signedText(row, areaUnit),
+      align: 'right',
+    },
+    ...(withValues ? [value] : []),
+    { id: 'for', header: 'For', value: (row) => row.jobNumber ?? row.purchaseOrderNumber },
+    { id: 'reason', header: 'Why', value: (row) => row.reason },
+    { id: 'by', header: 'By', value: (row) => row.actorName },
+  ];
+}
+
+/** The ledger of one lot or one hardware: nothing in it is ever changed. */
+export function MovementsTable({ item }: { item: Item }) {
+  const workshop = useWorkshop();
+  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(
+    movementsQuery(item),
+  );
+  const rows = useMemo(() => data?.pages.flatMap((page) => page.items) ?? [], [data]);
+  const withValues = rows.some((row) => row.value !== undefined);
+  const columns = useMemo(() => columnsFor(workshop, withValues), [workshop, withValues]);
+  return (
+    <DataTable
+      label="Movements"
+      rows={rows}
+      rowId={(row) => row.id}
+      columns={columns}
+      empty={
+        <EmptyState title="Nothing has moved yet.">
+          What comes in, is taken by a job or is counted is written here.
+        </EmptyState>
+      }
+      after={
+        hasNextPage && (
+          <div className="mt-4 text-center">
+            <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
+              Show earlier movements
+            </Button>
+          </div>
+        )
+      }
+    />
+  );
+}

@@ -1,0 +1,129 @@
+import type { PurchaseLine } from '@hidewright/contract';
+import { Plus } from 'lucide-react';
+import { useFieldArray, useWatch } from 'react-hook-form';
+import { Button } from '../../../components/button.tsx';
+import { MoneyField } from '../../../components/money-field.tsx';
+import { NumberField } from '../../../components/number-field.tsx';
+import { SelectField, type Choice } from '../../../components/select-field.tsx';
+import { countText } from '../../../lib/formatting.ts';
+import { blankHardware, isOpen, openOf, type TypedHardware } from '../typed-delivery.ts';
+
+interface ReceivedHardwareListProps {
+  lines: readonly PurchaseLine[];
+  hardware: readonly Choice[];
+  mayPrice: boolean;
+}
+
+/** The hardware and supplies that came, counted; of an order, what is still to come stands there already. */
+export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHardwareListProps) {
+  const { fields, append, remove } = useFieldArray({ name: 'hardware' });
+  const typed = (useWatch({ name: 'hardware' }) ?? []) as TypedHardware[];
+  const left = lines.filter(
+    (line) =>
+      line.of === 'hardware' &&
+      isOpen(line) &&
+      !typed.some((row) => row.purchaseLineId === line.id),
+  );
+  return (
+    <fieldset>
+      <legend className="mb-3 text-lg font-semibold">Hardware and supplies</legend>
+      <div className="space-y-4">
+        {fields.map((field, at) => (
+          <ReceivedHardware
+            key={field.id}
+            at={at}
+            line={lines.find(({ id }) => id === typed[at]?.purchaseLineId)}
+            hardware={hardware}
+            mayPrice={mayPrice}
+            onRemove={() => remove(at)}
+          />
+        ))}
+      </div>
+      <div className="mt-3 flex flex-wrap gap-2">
+        {left.map((line) => (
+          <Button
+            key={line.id}
+            onClick={() =>
+              append(blankHardware(line.hardwareId ?? undefined, line.id, restOf(line)))
+            }
+          >
+            <Plus size={18} aria-hidden="true" /> {line.name}
+          </Button>
+        ))}
+        {lines.length === 0 && (
+          <Button
+            onClick={() =>
+              append(blankHardware(undefined, null), {
+                focusName: `hardware.${fields.length}.hardwareId`,
+              })
+            }
+          >
+            <Plus size={18} aria-hidden="true" /> Hardware or supplies
+          </Button>
+        )}
+      </div>
+    </fieldset>
+  );
+}
+
+function restOf(line: PurchaseLine): number | undefined {
+  const open = openOf(line);
+  return 'quantity' in open ? open.quantity : undefined;
+}
+
+interface ReceivedHardwareProps {
+  at: number;
+  line: PurchaseLine | undefined;
+  hardware: readonly Choice[];
+  mayPrice: boolean;
+  onRemove: () => void;
+}
+
+function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHardwareProps) {
+  const row = `hardware.${at}`;
+  return (
+    <div
+      role="group"
+      aria-label={line?.name ?? `Hardware ${at + 1}`}
+      className="rounded border border-stitch bg-paper p-4"
+    >
+      <div className="mb-3 flex items-start justify-between gap-4">
+        <p className="font-semibold">
+          {line?.name ?? `Hardware ${at + 1}`}
+          {line && (
+            <span className="block text-sm font-normal text-ink-soft">
+              {countText(restOf(line) ?? 0)} to come
+            </span>
+          )}
+        </p>
+        <Button
+          tone="quiet"
+          onClick={onRemove}
+          aria-label={`Take out ${line?.name ?? `hardware ${at + 1}`}`}
+        >
+          Take it out
+        </Button>
+      </div>
+      <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
+        {!line && (
+          <SelectField
+            name={`${row}.hardwareId`}
+            label="Hardware or supplies"
+            placeholder="Choose one"
+            choices={hardware}
+          />
+        )}
+        <NumberField name={`${row}.quantity`} label="Came" unit="pieces" />
+        {mayPrice && !line && (
+          <MoneyField
+            name={`${row}.cost`}
+            label="Cost of all"
+            optional
+            whenEmpty="null"
+            help="Left empty, it is worked out from the price."
+          />
+        )}
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,67 @@
+import type { PurchaseLine } from '@hidewright/contract';
+import { Plus } from 'lucide-react';
+import { useFieldArray, useWatch } from 'react-hook-form';
+import { Button } from '../../../components/button.tsx';
+import type { Choice } from '../../../components/select-field.tsx';
+import { areaText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { blankLot, isOpen, openOf, type TypedLot } from '../typed-delivery.ts';
+import { ReceivedLot } from './received-lot.tsx';
+
+interface ReceivedLotListProps {
+  lines: readonly PurchaseLine[];
+  leathers: readonly Choice[];
+  mayPrice: boolean;
+}
+
+/** The lots that came, each a card; of an order, one press adds another lot of the same leather. */
+export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListProps) {
+  const { fields, append, remove } = useFieldArray({ name: 'lots' });
+  const { areaUnit } = useWorkshop();
+  const lots = (useWatch({ name: 'lots' }) ?? []) as TypedLot[];
+  const open = lines.filter((line) => line.of === 'leather' && isOpen(line));
+  const add = (lot: TypedLot) =>
+    append(lot, { focusName: `lots.${fields.length}.measuredAreaMm2` });
+
+  function toCome(line: PurchaseLine): string {
+    const rest = openOf(line);
+    return 'areaMm2' in rest ? `${areaText(rest.areaMm2, areaUnit)} to come` : '';
+  }
+
+  return (
+    <fieldset>
+      <legend className="mb-3 text-lg font-semibold">Leather</legend>
+      <div className="space-y-4">
+        {fields.map((field, at) => {
+          const line = lines.find(({ id }) => id === lots[at]?.purchaseLineId);
+          return (
+            <ReceivedLot
+              key={field.id}
+              at={at}
+              ordered={line && { name: line.name, toCome: toCome(line) }}
+              leathers={leathers}
+              mayPrice={mayPrice}
+              onRemove={() => remove(at)}
+            />
+          );
+        })}
+      </div>
+      <div className="mt-3 flex flex-wrap gap-2">
+        {open.map((line) => (
+          <Button key={line.id} onClick={() => add(blankLot(line.leatherId ?? undefined, line.id))}>
+            <Plus size={18} aria-hidden="true" /> A lot of {line.name}
+          </Button>
+        ))}
+        {lines.length === 0 && (
+          <Button
+            onClick={() =>
+              append(blankLot(undefined, null), { focusName: `lots.${fields.length}.leatherId` })
+            }
+          >
+            <Plus size={18} aria-hidden="true" /> A lot of leather
+          </Button>
+        )}
+      </div>
+    </fieldset>
+  );
+}

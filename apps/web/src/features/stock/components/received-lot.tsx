@@ -1,0 +1,117 @@
+import { lotForms, type LotForm } from '@hidewright/contract';
+import { get, useFormState, useWatch } from 'react-hook-form';
+import { useState } from 'react';
+import { AreaField } from '../../../components/area-field.tsx';
+import { Button } from '../../../components/button.tsx';
+import { LengthField } from '../../../components/length-field.tsx';
+import { MoneyField } from '../../../components/money-field.tsx';
+import { NumberField } from '../../../components/number-field.tsx';
+import { SelectField, type Choice } from '../../../components/select-field.tsx';
+import { TextField } from '../../../components/text-field.tsx';
+
+const forms = lotForms.map((form) => ({ value: form, label: form }));
+/** What comes in bundles, cut to a size. */
+const cutToSize: readonly LotForm[] = ['panel', 'strip', 'offcut'];
+
+interface ReceivedLotProps {
+  at: number;
+  /** The line of the order that it belongs to. */
+  ordered: { name: string; toCome: string } | undefined;
+  leathers: readonly Choice[];
+  mayPrice: boolean;
+  onRemove: () => void;
+}
+
+/** One lot: what must be said of it in sight, the rest behind one press. */
+export function ReceivedLot({ at, ordered, leathers, mayPrice, onRemove }: ReceivedLotProps) {
+  const lot = `lots.${at}`;
+  const form = useWatch({ name: `${lot}.form` }) as LotForm;
+  return (
+    <div
+      role="group"
+      aria-label={`Lot ${at + 1}`}
+      className="rounded border border-stitch bg-paper p-4"
+    >
+      <div className="mb-3 flex items-start justify-between gap-4">
+        <p className="font-semibold">
+          {ordered?.name ?? `Lot ${at + 1}`}
+          {ordered && (
+            <span className="block text-sm font-normal text-ink-soft">{ordered.toCome}</span>
+          )}
+        </p>
+        <Button tone="quiet" onClick={onRemove} aria-label={`Take out lot ${at + 1}`}>
+          Take it out
+        </Button>
+      </div>
+      <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
+        {!ordered && (
+          <SelectField
+            name={`${lot}.leatherId`}
+            label="Leather"
+            placeholder="Choose a leather"
+            choices={leathers}
+          />
+        )}
+        <AreaField
+          name={`${lot}.measuredAreaMm2`}
+          label="Measured area"
+          help="As marked on the flesh side: 24.75 or 24³."
+        />
+        <SelectField name={`${lot}.form`} label="Form" choices={forms} />
+        {cutToSize.includes(form) && (
+          <>
+            <NumberField name={`${lot}.pieces`} label={`How many in the bundle`} />
+            <LengthField name={`${lot}.widthMm`} label="Width of one" optional whenEmpty="null" />
+            <LengthField name={`${lot}.heightMm`} label="Height of one" optional whenEmpty="null" />
+          </>
+        )}
+        <TextField name={`${lot}.place`} label="Place" optional />
+      </div>
+      <MoreOfLot lot={lot} mayPrice={mayPrice} />
+    </div>
+  );
+}
+
+const furtherFields = ['tag', 'shade', 'grade', 'supplierLot', 'cost'];
+
+/** Opens by itself where something in it must be put right. */
+function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
+  const [asked, setAsked] = useState(false);
+  const { errors } = useFormState();
+  const wrong = furtherFields.some((field) => get(errors, `${lot}.${field}`) !== undefined);
+  const open = asked || wrong;
+  return (
+    <>
+      <Button
+        tone="quiet"
+        className="mt-2 -ml-3"
+        aria-expanded={open}
+        onClick={() => setAsked(!open)}
+      >
+        {open ? 'Less' : mayPrice ? 'Tag, shade, grade, cost' : 'Tag, shade, grade'}
+      </Button>
+      {open && (
+        <div className="mt-2 grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
+          <TextField
+            name={`${lot}.tag`}
+            label="Tag"
+            optional
+            help="Left empty, the next number is drawn."
+          />
+          <TextField name={`${lot}.shade`} label="Shade" optional />
+          <TextField name={`${lot}.grade`} label="Grade" optional />
+          <TextField name={`${lot}.supplierLot`} label="Supplier’s lot" optional />
+          {mayPrice && (
+            <MoneyField
+              name={`${lot}.cost`}
+              label="Cost of the lot"
+              optional
+              whenEmpty="null"
+              help="Left empty, it is worked out from the price per ft²."
+            />
+          )}
+        </div>
+      )}
+    </>
+  );
+}

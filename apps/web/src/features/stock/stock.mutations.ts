@@ -1,0 +1,6 @@
+import { adjustStock, receiveDelivery } from '@hidewright/contract';
+import { useSend } from '../../lib/use-send.ts';
+
+export const useAdjustStock = () => useSend(adjustStock);
+
+export const useReceiveDelivery = () => useSend(receiveDelivery);
