@@ -18,7 +18,7 @@ export function InputFrame({ id, unit, invalid, short, children }: InputFramePro
       className={classNames(
         'flex min-h-10 items-center rounded border bg-card focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-verdigris',
         invalid ? 'border-2 border-oxblood' : 'border-edge',
-        short ? 'w-44' : 'w-full',
+        short ? 'w-44 max-w-full' : 'w-full',
       )}
     >
       {children}

@@ -180,7 +180,7 @@ describe('the numbers of a run', { timeout: 60_000 }, () => {
     fc.assert(
       fc.property(aRun, (input) => {
         const backwards = { ...input, breaks: [...input.breaks].reverse() };
-        expect(priceRun(backwards)).toEqual(priceRun(structuredClone(input)));
+        expect(priceRun(backwards)).toEqual(priceRun({ ...input }));
       }),
       { numRuns: 20 },
     );

@@ -49,7 +49,7 @@ describe('a layout on a panel', { timeout: 300_000 }, () => {
   it('gives the same for the same', () => {
     fc.assert(
       fc.property(aPanelInput, (input) => {
-        expect(layOut(structuredClone(input))).toEqual(layOut(input));
+        expect(layOut({ ...input })).toEqual(layOut(input));
       }),
       { numRuns: 10 },
     );

@@ -1,7 +1,7 @@
 import type { RouteObject } from 'react-router-dom';
 
 const nameOf = (customer: unknown) => (customer as { name: string }).name;
-const numberOf = (quote: unknown) => (quote as { number: string }).number;
+const numberOf = (paper: unknown) => (paper as { number: string }).number;
 
 export const counterRoutes: RouteObject[] = [
   {
@@ -17,6 +17,14 @@ export const counterRoutes: RouteObject[] = [
           { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-quote.tsx') },
           { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./counter/quote.tsx') },
           { path: ':id/change', handle: { crumb: numberOf }, lazy: () => import('./counter/change-quote.tsx') },
+        ],
+      },
+      {
+        path: 'orders',
+        handle: { crumb: 'Orders' },
+        children: [
+          { index: true, lazy: () => import('./counter/orders.tsx') },
+          { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./counter/order.tsx') },
         ],
       },
       {

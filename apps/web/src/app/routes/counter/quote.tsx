@@ -16,6 +16,7 @@ import { QuoteTicket } from '../../../features/quotes/components/quote-ticket.ts
 import { quoteQuery } from '../../../features/quotes/quotes.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
+import { AcceptRun } from './accept-run.tsx';
 
 export async function loader({ params }: LoaderFunctionArgs) {
   return queryClient.ensureQueryData(quoteQuery(Number(params['id'])));
@@ -33,6 +34,7 @@ export function Component() {
       <PageTitle>{`Quote ${quote.number}`}</PageTitle>
       <QuoteTicket quote={quote} actions={isOwner && <QuoteActions quote={quote} />} />
       <Stitch className="my-5" />
+      {isOwner && quote.state === 'agreed' && <AcceptRun quote={quote} quantity={quantity} className="mb-5" />}
       <div className="grid items-start gap-5 lg:grid-cols-2 xl:grid-cols-[minmax(0,25.5rem)_minmax(0,1fr)_minmax(0,20rem)]">
         <LayoutCard
           layout={quote.layout}
@@ -55,6 +57,7 @@ export function Component() {
         </div>
         <div className="space-y-5 lg:col-span-2 xl:col-span-1">
           <CustomerAnswer quote={quote} quantity={quantity} isOwner={isOwner} />
+          {isOwner && quote.state !== 'agreed' && <AcceptRun quote={quote} quantity={quantity} />}
           <OtherRevisions quote={quote} />
         </div>
       </div>

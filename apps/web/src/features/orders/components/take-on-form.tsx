@@ -1,7 +1,7 @@
 import { takeOnOrder, type Order, type RunCheck } from '@hidewright/contract';
 import { Checkbox } from '../../../components/checkbox.tsx';
-import { DayField } from '../../../components/day-field.tsx';
 import { Form } from '../../../components/form.tsx';
+import { Notice } from '../../../components/notice.tsx';
 import { dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useTakeOnOrder } from '../orders.mutations.ts';
@@ -14,20 +14,21 @@ interface TakeOnFormProps {
   onTakenOn: (order: Order) => unknown;
 }
 
-/** Makes the order, its job and what is held for it, at once; a day is promised. */
+/** Makes the order, its job and what is held for it, at once; the day that was checked is the day promised. */
 export function TakeOnForm({ quoteId, inHandsOn, check, onTakenOn }: TakeOnFormProps) {
   const { today } = useWorkshop();
   const { mutateAsync } = useTakeOnOrder();
-  const inHands = inHandsOn === null ? 'The day it leaves the shop.' : `It must be in the customer’s hands on ${dayText(inHandsOn, today)}.`;
   return (
     <Form
       schema={takeOnOrder.body}
       draftKey={`take-on-${quoteId}`}
       defaults={{ quoteId, promisedOn: check.by, awaits: [], evenIfShort: false }}
-      onSend={async (body) => onTakenOn(await mutateAsync({ body }))}
-      submitWord="Take it on"
+      onSend={async (body) => onTakenOn(await mutateAsync({ body: { ...body, promisedOn: check.by } }))}
+      submitWord={`Take it on, packed by ${dayText(check.by, today)}`}
     >
-      <DayField name="promisedOn" label="Promise it for" min={today} help={inHands} />
+      {inHandsOn !== null && check.by > inHandsOn && (
+        <Notice tone="attention">The customer needs it in hands on {dayText(inHandsOn, today)}, before that day.</Notice>
+      )}
       <AwaitsField />
       {!check.yes && (
         <Checkbox

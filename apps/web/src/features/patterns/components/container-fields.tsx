@@ -1,6 +1,7 @@
-import { useWatch } from 'react-hook-form';
 import { LengthField } from '../../../components/length-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
+import { useFreshErrors } from '../use-fresh-errors.ts';
+import { FieldRow } from './field-row.tsx';
 
 const forms = [
   { value: 'panel', label: 'Panel' },
@@ -9,15 +10,15 @@ const forms = [
 
 /** What the pieces are cut from, how far apart, and how far from its edge. */
 export function ContainerFields() {
-  const form = String(useWatch({ name: 'definition.container.form' }));
+  const form = useFreshErrors('definition.container', 'form');
   const long = form === 'strip' ? { name: 'lengthMm', label: 'Length' } : { name: 'heightMm', label: 'Height' };
   return (
     <>
       <RadioCards name="definition.container.form" label="Cut from" cards={forms} across />
-      <div className="flex flex-wrap gap-x-5 gap-y-4">
+      <FieldRow>
         <LengthField name="definition.container.widthMm" label="Width" whenEmpty="text" />
         <LengthField key={form} name={`definition.container.${long.name}`} label={long.label} whenEmpty="text" />
-      </div>
+      </FieldRow>
     </>
   );
 }
@@ -25,9 +26,9 @@ export function ContainerFields() {
 /** The least distance between two cuts, and the border that stays unused. */
 export function ClearanceFields() {
   return (
-    <div className="flex flex-wrap gap-x-5 gap-y-4">
+    <FieldRow>
       <LengthField name="definition.spacingMm" label="Spacing" help="between two cuts" whenEmpty="text" />
       <LengthField name="definition.trimMm" label="Trim" help="unused border" whenEmpty="text" />
-    </div>
+    </FieldRow>
   );
 }

@@ -5,6 +5,7 @@ import { NumberField } from '../../../components/number-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
 import { ClearanceFields, ContainerFields } from './container-fields.tsx';
 import { OutlineFields } from './outline-fields.tsx';
+import { FieldRow } from './field-row.tsx';
 
 const ways = [
   { value: 'outline', label: 'From its outline', detail: 'laid out and drawn to scale' },
@@ -34,11 +35,11 @@ function HandCountFields() {
   const alsoDrawn = useWatch({ name: 'definition.alsoDrawn' }) === true;
   return (
     <>
-      <div className="flex flex-wrap gap-x-5 gap-y-4">
+      <FieldRow>
         <NumberField name="definition.handCount.pieces" label="Pieces" whenEmpty="text" />
         <LengthField name="definition.handCount.widthMm" label="from a panel of" help="width" whenEmpty="text" />
         <LengthField name="definition.handCount.heightMm" label="by" help="height; 4 3/8 is fine" whenEmpty="text" />
-      </div>
+      </FieldRow>
       <Checkbox name="definition.alsoDrawn" label="Draw the outline too; the count still holds" />
       {alsoDrawn && <OutlineFields />}
     </>

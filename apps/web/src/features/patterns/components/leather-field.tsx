@@ -13,10 +13,14 @@ const name = 'definition.leatherId';
 
 /** The leather it is made of: chosen, or added in place. */
 export function LeatherField() {
-  const { setValue } = useFormContext();
+  const { setValue, clearErrors } = useFormContext();
   const { currency } = useWorkshop();
   const { data: leathers = [] } = useQuery(leatherChoicesQuery());
   const [adding, setAdding] = useState(false);
+  const choose = (id: number) => {
+    setValue(name, id, { shouldDirty: true });
+    clearErrors(name);
+  };
   const chosen = Number(useWatch({ name }));
   const leather = leathers.find(({ id }) => id === chosen);
   const price = leather?.pricePerFt2 === undefined ? '' : `${unitPriceText(leather.pricePerFt2)} ${currency} per ft²`;
@@ -35,11 +39,7 @@ export function LeatherField() {
       <Button tone="quiet" className="mt-1 -ml-3" onClick={() => setAdding(true)}>
         <Plus size={18} aria-hidden="true" /> Another leather
       </Button>
-      <AddLeatherDialog
-        open={adding}
-        onOpenChange={setAdding}
-        onAdded={({ id }) => setValue(name, id, { shouldDirty: true, shouldValidate: false })}
-      />
+      <AddLeatherDialog open={adding} onOpenChange={setAdding} onAdded={({ id }) => choose(id)} />
     </div>
   );
 }

@@ -1,6 +1,7 @@
-import { useWatch } from 'react-hook-form';
 import { LengthField } from '../../../components/length-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
+import { useFreshErrors } from '../use-fresh-errors.ts';
+import { FieldRow } from './field-row.tsx';
 
 const shapes = [
   { value: 'round', label: 'Round' },
@@ -32,15 +33,15 @@ const measures: Record<string, readonly { name: string; label: string; help?: st
 
 /** The closed curve that the cutting die cuts. */
 export function OutlineFields() {
-  const shape = String(useWatch({ name: 'definition.outline.shape' }));
+  const shape = useFreshErrors('definition.outline', 'shape');
   return (
     <>
       <RadioCards name="definition.outline.shape" label="Outline" cards={shapes} across />
-      <div className="flex flex-wrap gap-x-5 gap-y-4">
+      <FieldRow>
         {(measures[shape] ?? []).map(({ name, ...labels }) => (
           <LengthField key={`${shape} ${name}`} name={`definition.outline.${name}`} whenEmpty="text" {...labels} />
         ))}
-      </div>
+      </FieldRow>
     </>
   );
 }

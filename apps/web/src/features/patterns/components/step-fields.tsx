@@ -8,6 +8,7 @@ import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { blankStep } from '../typed-pattern.ts';
 import { RemoveButton } from './remove-button.tsx';
+import { FieldRow } from './field-row.tsx';
 
 const name = 'definition.work.steps';
 const perChoices = stepUnits.map((unit) => ({ value: unit, label: `per ${unit}` }));
@@ -50,12 +51,12 @@ function StepRow({ at, children }: { at: number; children: ReactNode }) {
         </div>
         <div className="flex">{children}</div>
       </div>
-      <div className="mt-3 flex flex-wrap gap-x-4 gap-y-3">
+      <FieldRow>
         <DecimalField name={field('setupMinutes')} label="Setup" unit="min" />
         <DecimalField name={field('secondsPerUnit')} label="Each takes" unit="s" />
         <SelectField name={field('per')} label="Counted" choices={perChoices} short />
         <DecimalField name={field('rejectPercent')} label="Rejects" unit="%" />
-      </div>
+      </FieldRow>
     </li>
   );
 }

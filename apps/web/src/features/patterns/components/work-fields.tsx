@@ -1,6 +1,7 @@
-import { useWatch } from 'react-hook-form';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
+import { useFreshErrors } from '../use-fresh-errors.ts';
+import { FieldRow } from './field-row.tsx';
 import { StepFields } from './step-fields.tsx';
 
 const ways = [
@@ -10,14 +11,14 @@ const ways = [
 
 /** How long it takes, and how many fail: one figure to begin with, or step by step. */
 export function WorkFields() {
-  const inSteps = useWatch({ name: 'definition.work.kind' }) === 'steps';
+  const inSteps = useFreshErrors('definition.work', 'kind') === 'steps';
   return (
     <>
       <RadioCards name="definition.work.kind" label="Work" cards={ways} across />
       {inSteps ? (
         <StepFields />
       ) : (
-        <div className="flex flex-wrap gap-x-5 gap-y-4">
+        <FieldRow>
           <DecimalField
             name="definition.work.minutes"
             label="Minutes per 100"
@@ -30,7 +31,7 @@ export function WorkFields() {
             unit="%"
             help="until your own runs say otherwise"
           />
-        </div>
+        </FieldRow>
       )}
     </>
   );

@@ -1,0 +1,50 @@
+import type { Quote } from '@hidewright/contract';
+import { useNavigate } from 'react-router-dom';
+import { Card } from '../../../components/card.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { say } from '../../../components/toast.ts';
+import { CanWeMakeIt } from '../../../features/orders/components/can-we-make-it.tsx';
+import { TakeOnForm } from '../../../features/orders/components/take-on-form.tsx';
+
+interface AcceptRunProps {
+  quote: Quote;
+  quantity: number;
+  className?: string;
+}
+
+/** From the question whether the shop can make it to the order that it takes on. */
+export function AcceptRun({ quote, quantity, className }: AcceptRunProps) {
+  const navigate = useNavigate();
+  const { orderId, orderNumber, state, inHandsOn } = quote;
+  if (orderId !== null) {
+    return (
+      <div className={className}>
+        <Card title="Taken on">
+          <p>
+            As <TextLink to={`/counter/orders/${orderId}`}>{orderNumber}</TextLink>.
+          </p>
+        </Card>
+      </div>
+    );
+  }
+  if (state !== 'draft' && state !== 'sent' && state !== 'agreed') return null;
+  return (
+    <div className={className}>
+      <CanWeMakeIt quoteId={quote.id} quantity={quantity} by={inHandsOn ?? undefined}>
+        {(check) =>
+          state === 'agreed' && (
+            <TakeOnForm
+              quoteId={quote.id}
+              inHandsOn={inHandsOn}
+              check={check}
+              onTakenOn={async (order) => {
+                say(`${order.number} is taken on.`);
+                await navigate(`/counter/orders/${order.id}`);
+              }}
+            />
+          )
+        }
+      </CanWeMakeIt>
+    </div>
+  );
+}
