@@ -28,6 +28,7 @@ const rooms = [
   ['api-background', 'apps/api/src/background/**'],
   ['api-migrations', 'apps/api/src/migrations/**'],
   ['api-seeders', 'apps/api/src/seeders/**'],
+  ['api-verify', 'apps/api/src/verify/**'],
   ['api-root', 'apps/api/src/*.ts'],
   ['web-test', ['apps/web/**/*.test.{ts,tsx}', 'apps/web/*.config.ts']],
   ['web-app', ['apps/web/src/main.tsx', 'apps/web/src/app/**']],
@@ -61,7 +62,11 @@ const directions = [
   { from: 'api-module', allow: [...apiInside, ['api-repository', sameModule]] },
   { from: 'api-repository', allow: apiInside },
   { from: 'api-entity', allow: ['api-entity', 'api-db', 'api-module'] },
-  { from: ['api-routes', 'api-flow', 'api-module'], allow: handedIn, importKind: 'type' },
+  {
+    from: ['api-routes', 'api-flow', 'api-module', 'api-http'],
+    allow: handedIn,
+    importKind: 'type',
+  },
   { from: 'api-root', allow: ['api-root', 'api-db', 'api-entity', 'api-migrations', ...handedIn] },
   { from: 'api-db', allow: ['api-db', 'api-entity', 'api-root', 'api-migrations'] },
   { from: 'api-http', allow: ['api-http', 'api-root', 'api-db', 'api-entity', 'api-module'] },
@@ -73,6 +78,7 @@ const directions = [
     allow: ['api-workers', 'api-papers', 'api-root', 'api-db', 'api-entity', 'api-module'],
   },
   { from: 'api-background', allow: [...apiInside, 'api-background', 'api-flow', 'api-outside'] },
+  { from: 'api-verify', allow: ['api-verify', 'api-root', 'api-db', 'api-entity', 'api-module'] },
   { from: 'api-migrations', allow: ['api-migrations', 'api-db'] },
   {
     from: 'api-seeders',
@@ -219,7 +225,10 @@ const typed = {
     '@typescript-eslint/no-import-type-side-effects': 'error',
     '@typescript-eslint/no-invalid-void-type': 'off',
     '@typescript-eslint/no-namespace': ['error', { allowDeclarations: true }],
-    '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+    '@typescript-eslint/no-unused-vars': [
+      'error',
+      { argsIgnorePattern: '^_', varsIgnorePattern: '^_$' },
+    ],
   },
 };
 

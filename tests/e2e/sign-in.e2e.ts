@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, expect } from 'vitest';
+import { afterAll, beforeAll } from 'vitest';
 import { closeBrowser, expectAccessible, walk } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
 

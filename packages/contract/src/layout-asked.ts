@@ -9,7 +9,8 @@ export interface HandCounted {
 }
 
 /** What the domain is asked: to lay out, or to take a hand count. */
-export type LayoutSource = { by: 'outline'; input: LayoutInput } | { by: 'hand count'; counted: HandCounted };
+export type LayoutSource =
+  { by: 'outline'; input: LayoutInput } | { by: 'hand count'; counted: HandCounted };
 
 /**
  * What a pattern's definition (or a request for a layout) asks of the domain. The page and the API both go
@@ -18,9 +19,13 @@ export type LayoutSource = { by: 'outline'; input: LayoutInput } | { by: 'hand c
  */
 export function layoutSourceOf(asked: LayoutAsked): LayoutSource {
   if (asked.layoutBy === 'hand count') {
-    if (asked.handCount === null) throw new TypeError('A layout by hand count without a hand count');
+    if (asked.handCount === null)
+      throw new TypeError('A layout by hand count without a hand count');
     const { pieces, widthMm, heightMm } = asked.handCount;
-    return { by: 'hand count', counted: { pieces, widthMm: Number(widthMm), heightMm: Number(heightMm) } };
+    return {
+      by: 'hand count',
+      counted: { pieces, widthMm: Number(widthMm), heightMm: Number(heightMm) },
+    };
   }
   if (asked.outline === null || asked.container === null) {
     throw new TypeError('A layout by outline without an outline or a container');

@@ -27,7 +27,11 @@ export const outline = z
         heightMm: side('height'),
         cornerRadiusMm,
       }),
-      z.strictObject({ shape: z.literal('oval'), widthMm: side('width'), heightMm: side('height') }),
+      z.strictObject({
+        shape: z.literal('oval'),
+        widthMm: side('width'),
+        heightMm: side('height'),
+      }),
       z.strictObject({
         shape: z.literal('tag'),
         lengthMm: side('length'),
@@ -97,15 +101,20 @@ export const layoutFields = {
 type LayoutFields = z.infer<z.ZodObject<typeof layoutFields>>;
 
 /** Whichever drives the layout must be there. */
-export function refineLayoutFields(asked: LayoutFields, context: Pick<z.RefinementCtx, 'addIssue'>): void {
+export function refineLayoutFields(
+  asked: LayoutFields,
+  context: Pick<z.RefinementCtx, 'addIssue'>,
+): void {
   const refuse = (field: keyof LayoutFields, message: string) =>
     context.addIssue({ code: 'custom', path: [field], message });
   if (asked.layoutBy === 'hand count') {
-    if (asked.handCount === null) refuse('handCount', 'Enter how many pieces a panel gives, and its size.');
+    if (asked.handCount === null)
+      refuse('handCount', 'Enter how many pieces a panel gives, and its size.');
     return;
   }
   if (asked.outline === null) refuse('outline', 'Draw the outline, or choose a hand count.');
-  if (asked.container === null) refuse('container', 'Choose the panel or strip that the pieces are cut from.');
+  if (asked.container === null)
+    refuse('container', 'Choose the panel or strip that the pieces are cut from.');
 }
 
 export const layoutAsked = z.strictObject(layoutFields).superRefine(refineLayoutFields);

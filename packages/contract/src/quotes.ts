@@ -65,8 +65,8 @@ const tooling = z
 /** What a person says about a quote; everything else is worked out from the pattern and the shop's values. */
 export const quoteBody = z
   .strictObject({
-    customerId: id,
-    patternId: id,
+    customerId: z.int('Choose a customer.').positive('Choose a customer.'),
+    patternId: z.int('Choose a pattern.').positive('Choose a pattern.'),
     /** What the customer calls it; the pattern's name where it is empty. */
     title: optionalLine(80).default(''),
     inHandsOn: day.nullable().default(null),

@@ -1,7 +1,18 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { id, idParams, instant, line, money, optionalLine, page, pageQuery, positiveCount, version } from './fields.ts';
+import {
+  id,
+  idParams,
+  instant,
+  line,
+  money,
+  optionalLine,
+  page,
+  pageQuery,
+  positiveCount,
+  version,
+} from './fields.ts';
 
 export const toolKinds = ['cutting die', 'stamp plate'] as const;
 export const toolStates = ['on the rack', 'on order', 'scrapped'] as const;
@@ -66,7 +77,11 @@ export const listTools = endpoint({
   path: '/tools',
   summary: 'Cutting dies and stamp plates',
   access: readers,
-  query: pageQuery.extend({ kind: kind.optional(), state: state.optional(), patternId: z.coerce.number().int().positive().optional() }),
+  query: pageQuery.extend({
+    kind: kind.optional(),
+    state: state.optional(),
+    patternId: z.coerce.number().int().positive().optional(),
+  }),
   reply: page(tool),
 });
 

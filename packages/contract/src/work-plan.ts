@@ -5,7 +5,10 @@ import { onceSound } from './once-sound.ts';
 /** What a step is counted per. */
 export const stepUnits = ['piece', 'strike', 'panel', 'strip', 'run'] as const;
 
-const rejectPercent = percent.refine((text) => Number(text) <= 99, onceSound('Enter rejects from 0 to 99 %.'));
+const rejectPercent = percent.refine(
+  (text) => Number(text) <= 99,
+  onceSound('Enter rejects from 0 to 99 %.'),
+);
 
 export const workStep = z.strictObject({
   name: line(60, 'Enter what is done, such as cut or set rivets.'),

@@ -7,7 +7,12 @@ import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { keepLayout, type WorkedLayout } from '../modules/layouts/stored-layouts.ts';
 import { Leather } from '../modules/leathers/leather.entity.ts';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
-import { definitionOf, findPattern, latestVersion, sameDefinition } from '../modules/patterns/pattern-versions.ts';
+import {
+  definitionOf,
+  findPattern,
+  latestVersion,
+  sameDefinition,
+} from '../modules/patterns/pattern-versions.ts';
 import { Pattern } from '../modules/patterns/pattern.entity.ts';
 import type { Work } from '../work.ts';
 
@@ -27,7 +32,11 @@ export async function addPattern(
   await work.em.flush();
   await addVersion(work, pattern, asked.definition);
   await keepLayout(work, worked);
-  await logDeed(work, { action: `added pattern ${pattern.name}`, subjectKind: 'pattern', subjectId: pattern.id });
+  await logDeed(work, {
+    action: `added pattern ${pattern.name}`,
+    subjectKind: 'pattern',
+    subjectId: pattern.id,
+  });
   return pattern;
 }
 
@@ -49,8 +58,13 @@ export async function changePattern(
   worked: WorkedLayout,
 ): Promise<Pattern> {
   const pattern = await findPattern(work, asked.id);
-  await requireVersion(work.em, { kind: 'pattern', id: pattern.id, version: pattern.version }, asked.ifMatch);
-  if (asked.change.name !== undefined) await requireFreeName(work.em, Pattern, asked.change.name, pattern.id);
+  await requireVersion(
+    work.em,
+    { kind: 'pattern', id: pattern.id, version: pattern.version },
+    asked.ifMatch,
+  );
+  if (asked.change.name !== undefined)
+    await requireFreeName(work.em, Pattern, asked.change.name, pattern.id);
   if (asked.change.definition !== undefined) await requireParts(work, asked.change.definition);
   const { name = pattern.name, active = pattern.active, definition } = asked.change;
   const redesigned = definition !== undefined && (await isNew(work, pattern, definition));
@@ -62,17 +76,27 @@ export async function changePattern(
     await keepLayout(work, worked);
   }
   await work.em.flush();
-  const action = redesigned ? `made version ${pattern.latestVersion} of pattern ${name}` : `changed pattern ${name}`;
+  const action = redesigned
+    ? `made version ${pattern.latestVersion} of pattern ${name}`
+    : `changed pattern ${name}`;
   const detail = { changed: Object.keys(asked.change) };
   await logDeed(work, { action, subjectKind: 'pattern', subjectId: pattern.id, detail });
   return pattern;
 }
 
-async function isNew(work: Work, pattern: Pattern, definition: PatternDefinition): Promise<boolean> {
+async function isNew(
+  work: Work,
+  pattern: Pattern,
+  definition: PatternDefinition,
+): Promise<boolean> {
   return !sameDefinition(definitionOf(await latestVersion(work, pattern)), definition);
 }
 
-async function addVersion(work: Work, pattern: Pattern, definition: PatternDefinition): Promise<void> {
+async function addVersion(
+  work: Work,
+  pattern: Pattern,
+  definition: PatternDefinition,
+): Promise<void> {
   work.em.create(PatternVersion, {
     patternId: pattern.id,
     number: pattern.latestVersion,
@@ -83,10 +107,16 @@ async function addVersion(work: Work, pattern: Pattern, definition: PatternDefin
   await work.em.flush();
 }
 
-async function requireParts({ em }: Work, { leatherId, hardware }: PatternDefinition): Promise<void> {
+async function requireParts(
+  { em }: Work,
+  { leatherId, hardware }: PatternDefinition,
+): Promise<void> {
   const faults: FieldFault[] = [];
   if ((await em.count(Leather, { id: leatherId })) === 0) {
-    faults.push({ field: 'definition.leatherId', message: 'This leather is not there. Choose one from the list.' });
+    faults.push({
+      field: 'definition.leatherId',
+      message: 'This leather is not there. Choose one from the list.',
+    });
   }
   const known = await em.find(Hardware, { id: { $in: hardware.map((each) => each.hardwareId) } });
   hardware.forEach(({ hardwareId }, at) => {

@@ -1,5 +1,9 @@
 import { Decimal } from 'decimal.js';
-import type { addTool as addToolEndpoint, BodyOf, changeTool as changeToolEndpoint } from '@hidewright/contract';
+import type {
+  addTool as addToolEndpoint,
+  BodyOf,
+  changeTool as changeToolEndpoint,
+} from '@hidewright/contract';
 import { assignDefined } from '../db/assign-defined.ts';
 import { requireVersion } from '../http/conditions.ts';
 import { invalid, type FieldFault } from '../http/problem.ts';
@@ -33,7 +37,11 @@ export async function changeTool(
   asked: { id: number; ifMatch: number; change: BodyOf<typeof changeToolEndpoint> },
 ): Promise<Tool> {
   const tool = await findTool(work, asked.id);
-  await requireVersion(work.em, { kind: 'tool', id: tool.id, version: tool.version }, asked.ifMatch);
+  await requireVersion(
+    work.em,
+    { kind: 'tool', id: tool.id, version: tool.version },
+    asked.ifMatch,
+  );
   const { cost, ...plain } = asked.change;
   if (plain.state !== undefined) requireNextState(tool, plain.state);
   await requireSound(work, afterChange(tool, plain));
@@ -41,7 +49,12 @@ export async function changeTool(
   if (cost !== undefined) tool.cost = new Decimal(cost);
   await work.em.flush();
   const detail = { changed: Object.keys(asked.change), state: tool.state };
-  await logDeed(work, { action: `changed ${nameOf(tool)}`, subjectKind: 'tool', subjectId: tool.id, detail });
+  await logDeed(work, {
+    action: `changed ${nameOf(tool)}`,
+    subjectKind: 'tool',
+    subjectId: tool.id,
+    detail,
+  });
   return tool;
 }
 
@@ -54,17 +67,26 @@ async function nextNumber({ em }: Work, kind: Tool['kind']): Promise<string> {
   return String(Math.max(0, ...numbers) + 1);
 }
 
-function afterChange(tool: Tool, change: { [K in keyof Checked]?: Checked[K] | undefined }): Checked {
+function afterChange(
+  tool: Tool,
+  change: { [K in keyof Checked]?: Checked[K] | undefined },
+): Checked {
   const { id, kind, number, metal, patternId, customerId } = tool;
   const checked = { id, kind, number, metal, patternId, customerId };
   assignDefined<Checked>(checked, change);
   return checked;
 }
 
-type Checked = Pick<Tool, 'kind' | 'number' | 'metal' | 'patternId' | 'customerId'> & { id?: number };
+type Checked = Pick<Tool, 'kind' | 'number' | 'metal' | 'patternId' | 'customerId'> & {
+  id?: number;
+};
 
 async function requireSound(work: Work, tool: Checked): Promise<void> {
-  const faults = [...metalFaults(tool), ...(await numberFaults(work, tool)), ...(await ownerFaults(work, tool))];
+  const faults = [
+    ...metalFaults(tool),
+    ...(await numberFaults(work, tool)),
+    ...(await ownerFaults(work, tool)),
+  ];
   if (faults.length > 0) throw invalid(faults);
 }
 
@@ -73,7 +95,9 @@ function metalFaults({ kind, metal }: Checked): FieldFault[] {
     return [{ field: 'metal', message: 'Choose what the plate is made of.' }];
   }
   if (kind === 'cutting die' && metal !== '' && metal !== 'steel') {
-    return [{ field: 'metal', message: 'A cutting die is of steel. Choose steel, or leave it empty.' }];
+    return [
+      { field: 'metal', message: 'A cutting die is of steel. Choose steel, or leave it empty.' },
+    ];
   }
   return [];
 }
@@ -81,16 +105,27 @@ function metalFaults({ kind, metal }: Checked): FieldFault[] {
 async function numberFaults({ em }: Work, { id, kind, number }: Checked): Promise<FieldFault[]> {
   const other = await em.findOne(Tool, { kind, number });
   if (other === null || other.id === id) return [];
-  return [{ field: 'number', message: `There is a ${kind} ${number} already. Choose another number.` }];
+  return [
+    { field: 'number', message: `There is a ${kind} ${number} already. Choose another number.` },
+  ];
 }
 
-async function ownerFaults({ em }: Work, { patternId, customerId }: Checked): Promise<FieldFault[]> {
+async function ownerFaults(
+  { em }: Work,
+  { patternId, customerId }: Checked,
+): Promise<FieldFault[]> {
   const faults: FieldFault[] = [];
   if (patternId !== null && (await em.findOne(Pattern, patternId)) === null) {
-    faults.push({ field: 'patternId', message: 'This pattern is not there. Choose one from the list.' });
+    faults.push({
+      field: 'patternId',
+      message: 'This pattern is not there. Choose one from the list.',
+    });
   }
   if (customerId !== null && (await em.findOne(Customer, customerId)) === null) {
-    faults.push({ field: 'customerId', message: 'This customer is not there. Choose one from the list.' });
+    faults.push({
+      field: 'customerId',
+      message: 'This customer is not there. Choose one from the list.',
+    });
   }
   return faults;
 }

@@ -1,4 +1,5 @@
 import { blankPaper, bytesOf, ink, inkSoft, russet, sheet, stitchAcross, ticketHead, type Paper } from './paper.ts';
+import { printedDay, printedNumber } from './paper-text.ts';
 
 /** A quote as the customer gets it: nothing of what it costs the shop is in here. */
 export interface QuotePaper {
@@ -34,9 +35,9 @@ export function drawQuote(quote: QuotePaper): Promise<Uint8Array> {
 
 function drawDays(paper: Paper, quote: QuotePaper): void {
   const facts: [string, string][] = [
-    ['quoted', sayDay(quote.day)],
-    ['good until', sayDay(quote.validUntil)],
-    ...(quote.inHandsOn === null ? [] : [['in hands', sayDay(quote.inHandsOn)] as [string, string]]),
+    ['quoted', printedDay(quote.day)],
+    ['good until', printedDay(quote.validUntil)],
+    ...(quote.inHandsOn === null ? [] : [['in hands', printedDay(quote.inHandsOn)] as [string, string]]),
   ];
   facts.forEach(([label, value], at) => {
     const x = sheet.left + at * 160;
@@ -79,7 +80,7 @@ function drawPrices(paper: Paper, quote: QuotePaper, top: number): number {
   drawRow(paper, top, shown.map((column) => (tooled || column.title !== 'pieces alone' ? column.title : 'total')), inkSoft);
   let y = top + 18;
   for (const rung of quote.breaks) {
-    const cells = [rung.quantity.toLocaleString('en'), rung.priceEach, rung.goodsTotal, rung.total];
+    const cells = [String(rung.quantity), rung.priceEach, rung.goodsTotal, rung.total].map(printedNumber);
     drawRow(paper, y, cells.slice(0, shown.length), ink);
     y += 18;
   }
@@ -87,7 +88,7 @@ function drawPrices(paper: Paper, quote: QuotePaper, top: number): number {
   y += 14;
   for (const tool of quote.tooling) {
     paper.font('plain').fontSize(10).fillColor(ink).text(`${tool.name}, charged once`, sheet.left, y, { width: 320, height: 14, ellipsis: true });
-    paper.text(tool.charge, sheet.left + 340, y, { width: 143, align: 'right', lineBreak: false });
+    paper.text(printedNumber(tool.charge), sheet.left + 340, y, { width: 143, align: 'right', lineBreak: false });
     y += 16;
   }
   return y + 10;
@@ -109,10 +110,4 @@ function drawWords(paper: Paper, quote: QuotePaper, top: number): void {
   if (quote.message !== '') paper.moveDown().fillColor(ink).text(quote.message, { width });
   const from = [quote.shopName, quote.shopAddress].filter((part) => part !== '').join('\n');
   paper.moveDown(2).fillColor(inkSoft).text(from, { width });
-}
-
-/** A day in words, the same in every time zone: Mon 14 Dec 2026. */
-function sayDay(day: string): string {
-  const parts = { weekday: 'short', day: 'numeric', month: 'short', year: 'numeric', timeZone: 'UTC' } as const;
-  return new Intl.DateTimeFormat('en-GB', parts).format(new Date(`${day}T00:00:00Z`)).replace(',', '');
 }

@@ -1,7 +1,10 @@
 import type { PatternDefinition } from '@hidewright/contract';
 
 /** A round coaster of 95 mm on a panel of 11 × 13 in, for the tests. */
-export function coaster(leatherId: number, change: Partial<PatternDefinition> = {}): PatternDefinition {
+export function coaster(
+  leatherId: number,
+  change: Partial<PatternDefinition> = {},
+): PatternDefinition {
   return {
     layoutBy: 'outline',
     outline: { shape: 'round', diameterMm: '95' },

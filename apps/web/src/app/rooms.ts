@@ -23,7 +23,7 @@ export const rooms: readonly Room[] = [
     path: '/counter',
     word: 'Counter',
     icon: 'counter',
-    roles: ['owner', 'bookkeeper'],
+    roles: ['owner', 'maker', 'bookkeeper'],
     bar: ['owner', 'bookkeeper'],
   },
   {

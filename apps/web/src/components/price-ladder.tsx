@@ -45,8 +45,9 @@ export function PriceLadder({ rungs, target, currency, chosen, onChoose }: Price
             <span className="sr-only">left per hour against the target</span>
             <span
               aria-hidden="true"
-              className="absolute bottom-0.5 -translate-x-1/2 text-sm whitespace-nowrap text-brass"
-              style={{ left: `${share(target)}%` }}
+              className="absolute bottom-0.5 text-sm whitespace-nowrap text-brass"
+              // Its own share of itself to the left, so that it never leaves the column.
+              style={{ left: `${share(target)}%`, transform: `translateX(-${share(target)}%)` }}
             >
               target {numberText(target, 2)}
             </span>

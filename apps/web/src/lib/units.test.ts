@@ -33,6 +33,19 @@ describe('what a person types for a measure', () => {
     expect(lengthFigure('0.396875', 'in', 6)).toBe('0.015625');
   });
 
+  it.each([
+    ['11 in', 'mm', '279.4'],
+    ['4 3/8"', 'mm', '111.125'],
+    ['95 mm', 'in', '95'],
+    ['4⅜', 'in', '111.125'],
+  ] as const)('takes %s in a shop that measures in %s', (text, unit, mm) => {
+    expect(readLength(text, unit)).toBe(mm);
+  });
+
+  it.each(['in', '4 ft', '-4 in', '4 3/0 in'])('finds no length in %s', (text) => {
+    expect(readLength(text, 'mm')).toBeUndefined();
+  });
+
   it('shows again what was typed, tenth of a foot by tenth of a foot', () => {
     for (let tenths = 0; tenths < 300; tenths += 1) {
       const typed = String(tenths / 10);

@@ -2,7 +2,13 @@ import { Router } from 'express';
 import { readLayout, workOutLayout } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { serve } from '../../http/serve.ts';
-import { findLayout, keepLayout, layoutFor, layoutReply, type WorkedLayout } from './stored-layouts.ts';
+import {
+  findLayout,
+  keepLayout,
+  layoutFor,
+  layoutReply,
+  type WorkedLayout,
+} from './stored-layouts.ts';
 
 export function layoutRoutes(context: Context): Router {
   const router = Router();
@@ -15,7 +21,9 @@ export function layoutRoutes(context: Context): Router {
     ({ body }) => layoutFor(context, body),
   );
 
-  serve(router, context, readLayout, async ({ em }, { params }) => layoutReply(await findLayout(em, params.id)));
+  serve(router, context, readLayout, async ({ em }, { params }) =>
+    layoutReply(await findLayout(em, params.id)),
+  );
 
   return router;
 }

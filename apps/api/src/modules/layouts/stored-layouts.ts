@@ -37,12 +37,17 @@ export async function layoutFor(
   const stored = await context.orm.em.fork().findOne(StoredLayout, { inputHash });
   if (stored !== null) return { inputHash, source, layout: stored.result as Layout };
   const layout =
-    source.by === 'outline' ? await context.workers.layOut(source.input) : handCount(source.counted);
+    source.by === 'outline'
+      ? await context.workers.layOut(source.input)
+      : handCount(source.counted);
   return { inputHash, source, layout };
 }
 
 /** Stores a layout once, in the transaction that uses it; the same input finds the same row. */
-export async function keepLayout(work: Pick<Work, 'em' | 'now'>, worked: WorkedLayout): Promise<StoredLayout> {
+export async function keepLayout(
+  work: Pick<Work, 'em' | 'now'>,
+  worked: WorkedLayout,
+): Promise<StoredLayout> {
   const { inputHash, source, layout } = worked;
   const stored = await work.em.findOne(StoredLayout, { inputHash });
   if (stored !== null) return stored;
@@ -72,7 +77,8 @@ export async function findLayout(em: Work['em'], id: number): Promise<StoredLayo
 /** Refuses to price or to make what no leather gives: the layout says honestly that nothing fits. */
 export function requirePieces(layout: Layout, field = 'patternId'): void {
   if (layout.pieces > 0) return;
-  const message = 'Not one piece fits on the panel or strip of this pattern. Make the panel larger or the outline smaller.';
+  const message =
+    'Not one piece fits on the panel or strip of this pattern. Make the panel larger or the outline smaller.';
   throw invalid([{ field, message }]);
 }
 
@@ -93,6 +99,8 @@ export function layoutReply(stored: StoredLayout): StoredLayoutReply {
 
 function hashOf(source: LayoutSource): string {
   const key =
-    source.by === 'outline' ? layoutInputKey(source.input) : `hand count ${JSON.stringify(source.counted)}`;
+    source.by === 'outline'
+      ? layoutInputKey(source.input)
+      : `hand count ${JSON.stringify(source.counted)}`;
   return createHash('sha256').update(key).digest('hex');
 }

@@ -25,5 +25,7 @@ export function definitionOf(version: Pick<PatternVersion, 'definition'>): Patte
 
 /** Whether two definitions say the same. */
 export function sameDefinition(one: PatternDefinition, other: PatternDefinition): boolean {
-  return JSON.stringify(patternDefinition.parse(one)) === JSON.stringify(patternDefinition.parse(other));
+  return (
+    JSON.stringify(patternDefinition.parse(one)) === JSON.stringify(patternDefinition.parse(other))
+  );
 }

@@ -1,5 +1,9 @@
 import type { FilterQuery } from '@mikro-orm/core';
-import type { Pattern as PatternReply, PatternDefinition, PatternSummary } from '@hidewright/contract';
+import type {
+  Pattern as PatternReply,
+  PatternDefinition,
+  PatternSummary,
+} from '@hidewright/contract';
 import type { Layout } from '@hidewright/domain';
 import type { Work } from '../../work.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
@@ -37,8 +41,12 @@ export async function summarise({ em }: Work, patterns: Pattern[]): Promise<Patt
     const definition = definitionOf(version);
     return { version, definition, hash: layoutHash(definition) };
   });
-  const layouts = await em.find(StoredLayout, { inputHash: { $in: designs.map(({ hash }) => hash) } });
-  const leathers = await em.find(Leather, { id: { $in: designs.map(({ definition }) => definition.leatherId) } });
+  const layouts = await em.find(StoredLayout, {
+    inputHash: { $in: designs.map(({ hash }) => hash) },
+  });
+  const leathers = await em.find(Leather, {
+    id: { $in: designs.map(({ definition }) => definition.leatherId) },
+  });
   return patterns.flatMap((pattern) => {
     const design = designs.find(({ version }) => version.patternId === pattern.id);
     if (design === undefined) return [];
@@ -78,7 +86,9 @@ export async function describePattern(
 ): Promise<PatternReply> {
   const definition = definitionOf(version);
   const leather = await em.findOne(Leather, definition.leatherId);
-  const hardware = await em.find(Hardware, { id: { $in: definition.hardware.map((each) => each.hardwareId) } });
+  const hardware = await em.find(Hardware, {
+    id: { $in: definition.hardware.map((each) => each.hardwareId) },
+  });
   const nameOf = (id: number) => hardware.find((each) => each.id === id)?.name ?? '';
   return {
     id: pattern.id,

@@ -39,7 +39,11 @@ export function patternRoutes(context: Context): Router {
 
   serve(router, context, listPatternVersions, async (work, { params }) => {
     const { id } = await findPattern(work, params.id);
-    const versions = await work.em.find(PatternVersion, { patternId: id }, { orderBy: { number: 'desc' } });
+    const versions = await work.em.find(
+      PatternVersion,
+      { patternId: id },
+      { orderBy: { number: 'desc' } },
+    );
     return { items: versions.map(toVersion) };
   });
 
@@ -47,7 +51,8 @@ export function patternRoutes(context: Context): Router {
     router,
     context,
     addPatternEndpoint,
-    async (work, { body }, worked: WorkedLayout) => reply(work, await addPattern(work, body, worked), worked),
+    async (work, { body }, worked: WorkedLayout) =>
+      reply(work, await addPattern(work, body, worked), worked),
     ({ body }) => layoutFor(context, body.definition),
   );
 

@@ -12,7 +12,10 @@ let hardwareId: number;
 
 beforeAll(async () => {
   shop = await startTestShop();
-  const leather = await shop.as('owner').post('/api/leathers').send({ name: 'Oak tan 5–6 oz', pricePerFt2: '9.5' });
+  const leather = await shop
+    .as('owner')
+    .post('/api/leathers')
+    .send({ name: 'Oak tan 5–6 oz', pricePerFt2: '9.5' });
   leatherId = leather.body.id;
   const rivet = { name: 'Rivet 9 mm', kind: 'hardware', unitPrice: '0.17' };
   hardwareId = (await shop.as('owner').post('/api/hardware').send(rivet).expect(201)).body.id;
@@ -34,7 +37,11 @@ const faultsOf = (body: { errors: { field: string }[] }) => body.errors.map(({ f
 describe('a pattern', () => {
   it('is kept as designed, with names, a drawing and its layout', async () => {
     const pattern = await addPattern({ hardware: [{ hardwareId, perPiece: 2 }] });
-    expect(pattern).toMatchObject({ versionNumber: 1, leatherName: 'Oak tan 5–6 oz', description: 'round, 95 mm' });
+    expect(pattern).toMatchObject({
+      versionNumber: 1,
+      leatherName: 'Oak tan 5–6 oz',
+      description: 'round, 95 mm',
+    });
     expect(pattern.hardware).toEqual([{ hardwareId, perPiece: 2, name: 'Rivet 9 mm' }]);
     expect(pattern.layout.pieces).toBeGreaterThan(0);
     expect(pattern.outlinePath).toMatch(/^M /);
@@ -45,8 +52,20 @@ describe('a pattern', () => {
 
   it('carries steps as they were typed', async () => {
     const steps = [
-      { name: 'Strike', per: 'strike' as const, setupMinutes: '20', secondsPerUnit: '25', rejectPercent: '4' },
-      { name: 'Cut', per: 'piece' as const, setupMinutes: '5', secondsPerUnit: '12.5', rejectPercent: '0.5' },
+      {
+        name: 'Strike',
+        per: 'strike' as const,
+        setupMinutes: '20',
+        secondsPerUnit: '25',
+        rejectPercent: '4',
+      },
+      {
+        name: 'Cut',
+        per: 'piece' as const,
+        setupMinutes: '5',
+        secondsPerUnit: '12.5',
+        rejectPercent: '0.5',
+      },
     ];
     const { definition } = await addPattern({ work: { kind: 'steps', steps } });
     expect(definition.work).toEqual({ kind: 'steps', steps });
@@ -58,7 +77,10 @@ describe('a pattern', () => {
     const { body } = await change(pattern, { definition: wider }).expect(200);
     expect(body).toMatchObject({ versionNumber: 2, description: 'round, 101.6 mm' });
     expect(body.layout.pieces).toBeLessThanOrEqual(pattern.layout.pieces);
-    const { body: history } = await shop.as('maker').get(`/api/patterns/${pattern.id}/versions`).expect(200);
+    const { body: history } = await shop
+      .as('maker')
+      .get(`/api/patterns/${pattern.id}/versions`)
+      .expect(200);
     expect(history.items.map((each: { number: number }) => each.number)).toEqual([2, 1]);
     expect(history.items[1].definition).toEqual(pattern.definition);
   });
@@ -70,8 +92,12 @@ describe('a pattern', () => {
     const away = (await change(renamed, { active: false }).expect(200)).body;
     const same = (await change(away, { definition: pattern.definition }).expect(200)).body;
     expect(same).toEqual(away);
-    expect(await shop.context.orm.em.fork().count(PatternVersion, { patternId: pattern.id })).toBe(1);
-    const deeds = await shop.context.orm.em.fork().find(Activity, { subjectKind: 'pattern', subjectId: pattern.id });
+    expect(await shop.context.orm.em.fork().count(PatternVersion, { patternId: pattern.id })).toBe(
+      1,
+    );
+    const deeds = await shop.context.orm.em
+      .fork()
+      .find(Activity, { subjectKind: 'pattern', subjectId: pattern.id });
     expect(deeds.map(({ action }) => action)).toEqual([
       `added pattern ${pattern.name}`,
       'changed pattern Beer mat',
@@ -83,7 +109,11 @@ describe('a pattern', () => {
     const [first, second] = [await addPattern(), await addPattern({ spacingMm: '4' })];
     const page = (query: string) => shop.as('maker').get(`/api/patterns?${query}`).expect(200);
     const { body } = await page('limit=1');
-    expect(body.items[0]).toMatchObject({ id: second.id, pieces: second.layout.pieces, form: 'panel' });
+    expect(body.items[0]).toMatchObject({
+      id: second.id,
+      pieces: second.layout.pieces,
+      form: 'panel',
+    });
     const { body: next } = await page(`limit=1&cursor=${body.next}`);
     expect(next.items[0].id).toBe(first.id);
     const { body: found } = await page(`q=${encodeURIComponent(first.name)}&active=yes`);
@@ -98,7 +128,8 @@ describe('a pattern', () => {
 
   it('is made once however often the same request comes', async () => {
     const body = { name: 'Once only', definition: coaster(leatherId) };
-    const post = () => shop.as('owner').post('/api/patterns').set('Idempotency-Key', 'once-only').send(body);
+    const post = () =>
+      shop.as('owner').post('/api/patterns').set('Idempotency-Key', 'once-only').send(body);
     const replies = await Promise.all([post(), post()]);
     expect(replies.map(({ status }) => status)).toEqual([201, 201]);
     expect(replies[0].body.id).toBe(replies[1].body.id);
@@ -115,21 +146,43 @@ describe('a change', () => {
   it('of a version that is no longer there is refused, with who changed it', async () => {
     const pattern = await addPattern();
     await change(pattern, { definition: coaster(leatherId, { spacingMm: '3' }) }).expect(200);
-    const { body } = await change(pattern, { definition: coaster(leatherId, { spacingMm: '5' }) }).expect(412);
+    const { body } = await change(pattern, {
+      definition: coaster(leatherId, { spacingMm: '5' }),
+    }).expect(412);
     expect(body.changed.by).toBe('The owner');
     expect(body.changed.what).toContain('version 2');
-    expect(await shop.context.orm.em.fork().count(PatternVersion, { patternId: pattern.id })).toBe(2);
+    expect(await shop.context.orm.em.fork().count(PatternVersion, { patternId: pattern.id })).toBe(
+      2,
+    );
   });
 });
 
 describe('a pattern is refused', () => {
-  const step = { name: 'Cut', per: 'piece', setupMinutes: '0', secondsPerUnit: '12', rejectPercent: '0' };
+  const step = {
+    name: 'Cut',
+    per: 'piece',
+    setupMinutes: '0',
+    secondsPerUnit: '12',
+    rejectPercent: '0',
+  };
   it.each([
     ['without a leather', { leatherId: undefined }, 'definition.leatherId'],
     ['of a leather that is not there', { leatherId: 999_999 }, 'definition.leatherId'],
-    ['with hardware that is not there', { hardware: [{ hardwareId: 999_999, perPiece: 1 }] }, 'definition.hardware.0.hardwareId'],
-    ['with none of a hardware', { hardware: [{ hardwareId: 1, perPiece: 0 }] }, 'definition.hardware.0.perPiece'],
-    ['with half a rivet', { hardware: [{ hardwareId: 1, perPiece: 0.5 }] }, 'definition.hardware.0.perPiece'],
+    [
+      'with hardware that is not there',
+      { hardware: [{ hardwareId: 999_999, perPiece: 1 }] },
+      'definition.hardware.0.hardwareId',
+    ],
+    [
+      'with none of a hardware',
+      { hardware: [{ hardwareId: 1, perPiece: 0 }] },
+      'definition.hardware.0.perPiece',
+    ],
+    [
+      'with half a rivet',
+      { hardware: [{ hardwareId: 1, perPiece: 0.5 }] },
+      'definition.hardware.0.perPiece',
+    ],
     [
       'with the same hardware twice',
       { hardware: [1, 2].map((perPiece) => ({ hardwareId: 1, perPiece })) },
@@ -137,17 +190,33 @@ describe('a pattern is refused', () => {
     ],
     ['with negative spacing', { spacingMm: '-2' }, 'definition.spacingMm'],
     ['with a trim of NaN', { trimMm: Number.NaN }, 'definition.trimMm'],
-    ['with no minutes', { work: { kind: 'minutesPer100', minutes: '0', rejectPercent: '10' } }, 'definition.work.minutes'],
-    ['with negative minutes', { work: { kind: 'minutesPer100', minutes: '-3', rejectPercent: '10' } }, 'definition.work.minutes'],
+    [
+      'with no minutes',
+      { work: { kind: 'minutesPer100', minutes: '0', rejectPercent: '10' } },
+      'definition.work.minutes',
+    ],
+    [
+      'with negative minutes',
+      { work: { kind: 'minutesPer100', minutes: '-3', rejectPercent: '10' } },
+      'definition.work.minutes',
+    ],
     ['with no steps', { work: { kind: 'steps', steps: [] } }, 'definition.work.steps'],
     [
       'with a step that rejects everything',
       { work: { kind: 'steps', steps: [{ ...step, rejectPercent: '100' }] } },
       'definition.work.steps.0.rejectPercent',
     ],
-    ['with a step per hour', { work: { kind: 'steps', steps: [{ ...step, per: 'hour' }] } }, 'definition.work.steps.0.per'],
+    [
+      'with a step per hour',
+      { work: { kind: 'steps', steps: [{ ...step, per: 'hour' }] } },
+      'definition.work.steps.0.per',
+    ],
     ['with an unknown field', { colour: 'brown' }, 'definition.colour'],
-    ['with an outline that cannot be', { outline: { shape: 'oval', widthMm: '80', heightMm: '0' } }, 'definition.outline.heightMm'],
+    [
+      'with an outline that cannot be',
+      { outline: { shape: 'oval', widthMm: '80', heightMm: '0' } },
+      'definition.outline.heightMm',
+    ],
   ])('%s', async (_what, wrong, field) => {
     const body = { name: 'Never there', definition: { ...coaster(leatherId), ...wrong } };
     const reply = await shop.as('owner').post('/api/patterns').send(body).expect(422);
@@ -159,11 +228,18 @@ describe('a pattern is refused', () => {
   it('without a name, or with a name that is taken', async () => {
     const { name, id, version } = await addPattern();
     const post = (body: object) => shop.as('owner').post('/api/patterns').send(body).expect(422);
-    expect(faultsOf((await post({ name: ' ', definition: coaster(leatherId) })).body)).toEqual(['name']);
+    expect(faultsOf((await post({ name: ' ', definition: coaster(leatherId) })).body)).toEqual([
+      'name',
+    ]);
     expect(faultsOf((await post({ name, definition: coaster(leatherId) })).body)).toEqual(['name']);
     const other = await addPattern();
     expect(faultsOf((await change(other, { name }).expect(422)).body)).toEqual(['name']);
-    await shop.as('owner').patch(`/api/patterns/${id}`).set('If-Match', `"${version}"`).send({ name }).expect(200);
+    await shop
+      .as('owner')
+      .patch(`/api/patterns/${id}`)
+      .set('If-Match', `"${version}"`)
+      .send({ name })
+      .expect(200);
   });
 
   it('to whom it is not open', async () => {
@@ -171,7 +247,12 @@ describe('a pattern is refused', () => {
     const body = { name: 'By another', definition: coaster(leatherId) };
     for (const role of ['maker', 'bookkeeper'] as const) {
       await shop.as(role).post('/api/patterns').send(body).expect(403);
-      await shop.as(role).patch(`/api/patterns/${id}`).set('If-Match', `"${version}"`).send({ name: 'Y' }).expect(403);
+      await shop
+        .as(role)
+        .patch(`/api/patterns/${id}`)
+        .set('If-Match', `"${version}"`)
+        .send({ name: 'Y' })
+        .expect(403);
     }
     await shop.as('bookkeeper').get(`/api/patterns/${id}`).expect(403);
     await shop.nobody().get('/api/patterns').expect(401);

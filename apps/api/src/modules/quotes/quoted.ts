@@ -1,4 +1,5 @@
 import { sumMoney, type RunInput } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
 import { moneyText, priceText } from '../../http/decimal-text.ts';
 import type { Work } from '../../work.ts';
 import { QuoteBreak } from './quote-break.entity.ts';
@@ -23,7 +24,7 @@ export async function quotedOf(work: Pick<Work, 'em'>, quote: Pick<Quote, 'id' |
       goodsTotal: moneyText(rung.total.minus(toolingTotal)),
       total: moneyText(rung.total),
     })),
-    tooling: input.tooling.map(({ name, charge }) => ({ name, charge })),
+    tooling: input.tooling.map(({ name, charge }) => ({ name, charge: moneyText(new Decimal(charge)) })),
     toolingTotal,
   };
 }

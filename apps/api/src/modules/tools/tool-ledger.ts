@@ -17,7 +17,10 @@ export interface Uses {
  * the same transaction. Who calls it logs the deed that it belongs to.
  * @throws {Problem} 404, 409 when the tool is not on the rack, 422 when more is taken back than was counted
  */
-export async function addImpressions(work: Work, { toolId, uses, jobId, reason = '' }: Uses): Promise<Tool> {
+export async function addImpressions(
+  work: Work,
+  { toolId, uses, jobId, reason = '' }: Uses,
+): Promise<Tool> {
   const tool = await findTool(work, toolId);
   requireOnRack(tool);
   const used = tool.used + uses;

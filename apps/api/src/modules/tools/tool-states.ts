@@ -10,7 +10,10 @@ const next: Record<State, readonly State[]> = {
 };
 
 /** @throws {Problem} 409 with what is allowed: a scrapped tool stays scrapped, and nothing goes back on order */
-export function requireNextState(tool: Pick<Tool, 'kind' | 'number' | 'state'>, wanted: State): void {
+export function requireNextState(
+  tool: Pick<Tool, 'kind' | 'number' | 'state'>,
+  wanted: State,
+): void {
   if (wanted === tool.state || next[tool.state].includes(wanted)) return;
   const rest = next[tool.state];
   const advice = rest.length === 0 ? 'Add a new one instead.' : `Choose ${rest.join(' or ')}.`;

@@ -26,15 +26,21 @@ export async function listTools({ em }: Work, wanted: Wanted): Promise<Tool[]> {
     ...(kind === undefined ? {} : { kind }),
     ...(state === undefined ? {} : { state }),
     ...(patternId === undefined ? {} : { patternId }),
-    ...(q === undefined ? {} : { $or: [{ name: { $like: `%${q}%` } }, { number: q }, { slot: q }] }),
+    ...(q === undefined
+      ? {}
+      : { $or: [{ name: { $like: `%${q}%` } }, { number: q }, { slot: q }] }),
   };
   return em.find(Tool, where, { orderBy: { id: 'desc' }, limit: limit + 1 });
 }
 
 /** Tools with the names of what they belong to. */
 export async function describeTools({ em }: Work, tools: Tool[]): Promise<ToolReply[]> {
-  const patterns = await em.find(Pattern, { id: { $in: idsOf(tools.map((tool) => tool.patternId)) } });
-  const customers = await em.find(Customer, { id: { $in: idsOf(tools.map((tool) => tool.customerId)) } });
+  const patterns = await em.find(Pattern, {
+    id: { $in: idsOf(tools.map((tool) => tool.patternId)) },
+  });
+  const customers = await em.find(Customer, {
+    id: { $in: idsOf(tools.map((tool) => tool.customerId)) },
+  });
   return tools.map((tool) => ({
     id: tool.id,
     number: tool.number,
@@ -65,11 +71,17 @@ export async function listImpressions(
   { em }: Work,
   wanted: { toolId: number; below: number | undefined; limit: number },
 ): Promise<Impression[]> {
-  const where = { toolId: wanted.toolId, ...(wanted.below === undefined ? {} : { id: { $lt: wanted.below } }) };
+  const where = {
+    toolId: wanted.toolId,
+    ...(wanted.below === undefined ? {} : { id: { $lt: wanted.below } }),
+  };
   return em.find(Impression, where, { orderBy: { id: 'desc' }, limit: wanted.limit + 1 });
 }
 
-export async function describeImpressions({ em }: Work, rows: Impression[]): Promise<ImpressionReply[]> {
+export async function describeImpressions(
+  { em }: Work,
+  rows: Impression[],
+): Promise<ImpressionReply[]> {
   const jobs = await em.find(Job, { id: { $in: idsOf(rows.map((row) => row.jobId)) } });
   return rows.map(({ id, uses, jobId, at, reason, actorName }) => {
     const jobNumber = jobs.find((job) => job.id === jobId)?.number ?? null;

@@ -14,21 +14,38 @@ import { serve } from '../../http/serve.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { findTool } from './find-tool.ts';
 import { addImpressions } from './tool-ledger.ts';
-import { describeImpressions, describeTool, describeTools, listImpressions, listTools } from './tools.repository.ts';
+import {
+  describeImpressions,
+  describeTool,
+  describeTools,
+  listImpressions,
+  listTools,
+} from './tools.repository.ts';
 
 export function toolRoutes(context: Context): Router {
   const router = Router();
 
   serve(router, context, listToolsEndpoint, async (work, { query }) => {
     const { cursor, q, kind, state, patternId, limit } = query;
-    const rows = await listTools(work, { below: readCursor(cursor), q, kind, state, patternId, limit });
+    const rows = await listTools(work, {
+      below: readCursor(cursor),
+      q,
+      kind,
+      state,
+      patternId,
+      limit,
+    });
     const { items, next } = toPage(rows, limit, (row) => row.id);
     return { items: await describeTools(work, items), next };
   });
 
-  serve(router, context, readTool, async (work, { params }) => describeTool(work, await findTool(work, params.id)));
+  serve(router, context, readTool, async (work, { params }) =>
+    describeTool(work, await findTool(work, params.id)),
+  );
 
-  serve(router, context, addToolEndpoint, async (work, { body }) => describeTool(work, await addTool(work, body)));
+  serve(router, context, addToolEndpoint, async (work, { body }) =>
+    describeTool(work, await addTool(work, body)),
+  );
 
   serve(router, context, changeToolEndpoint, async (work, { params, body, ifMatch }) =>
     describeTool(work, await changeTool(work, { id: params.id, ifMatch, change: body })),
@@ -36,7 +53,11 @@ export function toolRoutes(context: Context): Router {
 
   serve(router, context, listImpressionsEndpoint, async (work, { params, query }) => {
     const { id } = await findTool(work, params.id);
-    const rows = await listImpressions(work, { toolId: id, below: readCursor(query.cursor), limit: query.limit });
+    const rows = await listImpressions(work, {
+      toolId: id,
+      below: readCursor(query.cursor),
+      limit: query.limit,
+    });
     const { items, next } = toPage(rows, query.limit, (row) => row.id);
     return { items: await describeImpressions(work, items), next };
   });

@@ -12,8 +12,20 @@ beforeAll(async () => {
 });
 afterAll(() => shop.close());
 
-const die = { kind: 'cutting die', name: 'Coaster 95 mm', cost: '84.00', lifeUses: 100_000, slot: 'A3' };
-const plate = { kind: 'stamp plate', name: 'Heron crest', metal: 'magnesium', cost: '46.50', lifeUses: 1000 };
+const die = {
+  kind: 'cutting die',
+  name: 'Coaster 95 mm',
+  cost: '84.00',
+  lifeUses: 100_000,
+  slot: 'A3',
+};
+const plate = {
+  kind: 'stamp plate',
+  name: 'Heron crest',
+  metal: 'magnesium',
+  cost: '46.50',
+  lifeUses: 1000,
+};
 
 async function add(body: object): Promise<ToolReply> {
   return (await shop.as('owner').post('/api/tools').send(body).expect(201)).body as ToolReply;
@@ -27,11 +39,22 @@ const faultsOf = (body: { errors: { field: string }[] }) => body.errors.map(({ f
 describe('a tool', () => {
   it('gets the next number of its kind, or the one that was typed', async () => {
     const first = await add(die);
-    expect(first).toMatchObject({ number: '1', cost: '84.00', used: 0, usesLeft: 100_000, state: 'on the rack', metal: '' });
+    expect(first).toMatchObject({
+      number: '1',
+      cost: '84.00',
+      used: 0,
+      usesLeft: 100_000,
+      state: 'on the rack',
+      metal: '',
+    });
     expect((await add({ ...plate, number: '41' })).number).toBe('41');
     expect((await add(plate)).number).toBe('42');
     expect((await add(die)).number).toBe('2');
-    const { body } = await shop.as('owner').post('/api/tools').send({ ...die, number: '2' }).expect(422);
+    const { body } = await shop
+      .as('owner')
+      .post('/api/tools')
+      .send({ ...die, number: '2' })
+      .expect(422);
     expect(faultsOf(body)).toEqual(['number']);
   });
 
@@ -48,7 +71,9 @@ describe('a tool', () => {
     const refused = await count(tool, 5).expect(409);
     expect(refused.body.allowed).toEqual(['on the rack']);
     const onRack = (await change(tool, { state: 'on the rack' }).expect(200)).body as ToolReply;
-    expect((await change(onRack, { state: 'on order' }).expect(409)).body.allowed).toEqual(['scrapped']);
+    expect((await change(onRack, { state: 'on order' }).expect(409)).body.allowed).toEqual([
+      'scrapped',
+    ]);
     const scrapped = (await change(onRack, { state: 'scrapped' }).expect(200)).body as ToolReply;
     expect((await change(scrapped, { state: 'on the rack' }).expect(409)).body.allowed).toEqual([]);
   });
@@ -60,7 +85,7 @@ describe('a tool', () => {
     expect((await list('q=oars')).map(({ id }) => id)).toEqual([tool.id]);
     expect((await list('q=C7')).map(({ id }) => id)).toEqual([tool.id]);
     expect((await list('kind=cutting+die')).every(({ kind }) => kind === 'cutting die')).toBe(true);
-    expect((await list('state=on+the+rack&q=oars'))).toHaveLength(1);
+    expect(await list('state=on+the+rack&q=oars')).toHaveLength(1);
     expect(await list('state=scrapped&q=oars')).toEqual([]);
   });
 });
@@ -73,10 +98,20 @@ describe('the ledger of impressions', () => {
     expect(worn).toMatchObject({ used: 1050, usesLeft: 0 });
     const { body } = await count(tool, -1051, 'counted twice').expect(422);
     expect(faultsOf(body)).toEqual(['uses']);
-    expect((await count(tool, -150, 'counted twice').expect(201)).body).toMatchObject({ used: 900, usesLeft: 100 });
-    const { body: rows } = await shop.as('maker').get(`/api/tools/${tool.id}/impressions`).expect(200);
+    expect((await count(tool, -150, 'counted twice').expect(201)).body).toMatchObject({
+      used: 900,
+      usesLeft: 100,
+    });
+    const { body: rows } = await shop
+      .as('maker')
+      .get(`/api/tools/${tool.id}/impressions`)
+      .expect(200);
     expect(rows.items.map((row: { uses: number }) => row.uses)).toEqual([-150, 150, 900]);
-    expect(rows.items[0]).toMatchObject({ reason: 'counted twice', actorName: 'The maker', jobNumber: null });
+    expect(rows.items[0]).toMatchObject({
+      reason: 'counted twice',
+      actorName: 'The maker',
+      jobNumber: null,
+    });
   });
 
   it('does not make the owner’s open edit stale', async () => {
@@ -127,7 +162,11 @@ describe('a tool is refused', () => {
   it('for counts that are none', async () => {
     const tool = await add(die);
     for (const uses of [0, 1.5, 'many']) {
-      const { body } = await shop.as('maker').post(`/api/tools/${tool.id}/impressions`).send({ uses, reason: 'x' }).expect(422);
+      const { body } = await shop
+        .as('maker')
+        .post(`/api/tools/${tool.id}/impressions`)
+        .send({ uses, reason: 'x' })
+        .expect(422);
       expect(faultsOf(body)).toEqual(['uses']);
     }
     expect(faultsOf((await count(tool, 5, ' ').expect(422)).body)).toEqual(['reason']);
@@ -136,7 +175,12 @@ describe('a tool is refused', () => {
   it('to whom it is not open; the maker reads no cost', async () => {
     const tool = await add(die);
     await shop.as('maker').post('/api/tools').send(die).expect(403);
-    await shop.as('maker').patch(`/api/tools/${tool.id}`).set('If-Match', '"1"').send({ slot: 'Z' }).expect(403);
+    await shop
+      .as('maker')
+      .patch(`/api/tools/${tool.id}`)
+      .set('If-Match', '"1"')
+      .send({ slot: 'Z' })
+      .expect(403);
     await shop.as('bookkeeper').get('/api/tools').expect(403);
     await shop.nobody().get('/api/tools').expect(401);
     const { body } = await shop.as('maker').get(`/api/tools/${tool.id}`).expect(200);

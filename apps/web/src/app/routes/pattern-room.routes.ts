@@ -13,9 +13,21 @@ export const patternRoomRoutes: RouteObject[] = [
         handle: { crumb: 'Patterns' },
         children: [
           { index: true, lazy: () => import('./pattern-room/patterns.tsx') },
-          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./pattern-room/new-pattern.tsx') },
-          { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/pattern.tsx') },
-          { path: ':id/change', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/change-pattern.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./pattern-room/new-pattern.tsx'),
+          },
+          {
+            path: ':id',
+            handle: { crumb: nameOf },
+            lazy: () => import('./pattern-room/pattern.tsx'),
+          },
+          {
+            path: ':id/change',
+            handle: { crumb: nameOf },
+            lazy: () => import('./pattern-room/change-pattern.tsx'),
+          },
         ],
       },
       {
@@ -23,7 +35,11 @@ export const patternRoomRoutes: RouteObject[] = [
         handle: { crumb: 'Tooling' },
         children: [
           { index: true, lazy: () => import('./pattern-room/tooling.tsx') },
-          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./pattern-room/new-tool.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./pattern-room/new-tool.tsx'),
+          },
           { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/tool.tsx') },
         ],
       },

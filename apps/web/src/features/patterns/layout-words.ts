@@ -25,22 +25,25 @@ export function layoutSubtitle(layout: LayoutReply): string {
 
 /** The figures that a person reads after the picture. */
 export function layoutFigures(layout: LayoutReply, { areaUnit, lengthUnit }: Units): KeyFigure[] {
-  const mm = (value: number) => lengthText(value.toFixed(4), lengthUnit, lengthUnit === 'mm' ? 1 : 3);
+  const mm = (value: number) =>
+    lengthText(value.toFixed(4), lengthUnit, lengthUnit === 'mm' ? 1 : 3);
   const figures: (KeyFigure | false)[] = [
     layout.yieldPercent !== null && {
       word: 'yield',
       figure: percentText(layout.yieldPercent),
-      note: layout.boundPieces !== null && `no layout gives more than ${countText(layout.boundPieces)}`,
+      note:
+        layout.boundPieces !== null && `no layout gives more than ${countText(layout.boundPieces)}`,
     },
     layout.areaPerPieceMm2 !== null && {
       word: 'leather for each piece',
       figure: areaText(layout.areaPerPieceMm2, areaUnit, 4),
       note: 'waste included',
     },
-    layout.pitchMm !== null && layout.rowStepMm !== null && {
-      word: 'pitch · row step',
-      figure: `${mm(layout.pitchMm)} · ${mm(layout.rowStepMm)}`,
-    },
+    layout.pitchMm !== null &&
+      layout.rowStepMm !== null && {
+        word: 'pitch · row step',
+        figure: `${mm(layout.pitchMm)} · ${mm(layout.rowStepMm)}`,
+      },
     layout.mmPerPiece !== null && {
       word: 'strip for each piece',
       figure: mm(layout.mmPerPiece),

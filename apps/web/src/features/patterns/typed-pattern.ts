@@ -1,4 +1,9 @@
-import { addPattern, type Pattern, type PatternDefinition, type Workshop } from '@hidewright/contract';
+import {
+  addPattern,
+  type Pattern,
+  type PatternDefinition,
+  type Workshop,
+} from '@hidewright/contract';
 import { z } from 'zod';
 
 /** What a form holds: every measure of every shape, so that going from one to another and back loses nothing. */
@@ -20,7 +25,13 @@ const workMeasures: Record<string, readonly string[]> = {
 };
 
 /** A step as it is before anything is typed. */
-export const blankStep = { name: '', per: 'piece', setupMinutes: '0', secondsPerUnit: '', rejectPercent: '0' };
+export const blankStep = {
+  name: '',
+  per: 'piece',
+  setupMinutes: '0',
+  secondsPerUnit: '',
+  rejectPercent: '0',
+};
 
 const blankDefinition = {
   layoutBy: 'outline',
@@ -106,7 +117,10 @@ function chosen(value: unknown, by: string, measures: Record<string, readonly st
 }
 
 /** The contract's own schema, asked of what the form would send: its sentences land beside the same fields. */
-export const patternForm = z.preprocess(patternBody, addPattern.body as z.ZodType) as unknown as z.ZodType<Typed, Typed>;
+export const patternForm = z.preprocess(
+  patternBody,
+  addPattern.body as z.ZodType,
+) as unknown as z.ZodType<Typed, Typed>;
 
 /** What is sent, after the form's schema has found nothing to say. */
 export function sentPattern(typed: unknown): { name: string; definition: PatternDefinition } {

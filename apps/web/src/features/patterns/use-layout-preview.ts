@@ -20,7 +20,9 @@ export function useLayoutPreview(source: LayoutSource | undefined): Preview {
     let worker: Worker | undefined;
     const start = setTimeout(() => {
       worker = new Worker(new URL('./layout-worker.ts', import.meta.url), { type: 'module' });
-      worker.addEventListener('message', ({ data }: MessageEvent<LaidOut>) => setAnswered({ key, answer: data }));
+      worker.addEventListener('message', ({ data }: MessageEvent<LaidOut>) =>
+        setAnswered({ key, answer: data }),
+      );
       worker.postMessage(JSON.parse(key));
     }, pauseMs);
     return () => {

@@ -1,4 +1,5 @@
-import { addPurchaseOrder, type PurchaseLine, type PurchaseOrder } from '@hidewright/contract';
+import type { addPurchaseOrder} from '@hidewright/contract';
+import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { mm2ToFootage, round } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { z } from 'zod';

@@ -1,4 +1,4 @@
-import { listPatterns, listQuotes, readQuote, readRunBasis, type QuoteState } from '@hidewright/contract';
+import { listPatterns, listQuotes, readQuote, readRunBasis, type Quote, type QuoteState } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -23,8 +23,13 @@ export function quoteQuery(id: number) {
     queryKey: ['quotes', id],
     queryFn: ({ signal }) => call(readQuote, { params: { id }, signal }),
     // Whether its mail has left, or its customer has agreed, shows without a reload.
-    refetchInterval: ({ state }) => (state.data?.letter?.state === 'waiting' ? 3000 : false),
+    refetchInterval: ({ state }) => refreshAfter(state.data),
   });
+}
+
+function refreshAfter(quote: Quote | undefined): number | false {
+  if (quote?.letter?.state === 'waiting') return 3000;
+  return quote?.state === 'sent' ? 20_000 : false;
 }
 
 /** What a run of a pattern is priced from, so that the page can price it as it is typed. */

@@ -1,4 +1,5 @@
-import { receiveDelivery, type PurchaseLine, type PurchaseOrder } from '@hidewright/contract';
+import type { receiveDelivery } from '@hidewright/contract';
+import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
 import type { z } from 'zod';
 

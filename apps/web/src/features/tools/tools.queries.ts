@@ -1,4 +1,10 @@
-import { listCustomers, listImpressions, listPatterns, listTools, readTool } from '@hidewright/contract';
+import {
+  listCustomers,
+  listImpressions,
+  listPatterns,
+  listTools,
+  readTool,
+} from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -22,7 +28,11 @@ export function impressionsQuery(id: number) {
   return infiniteQueryOptions({
     queryKey: ['tools', id, 'impressions'],
     queryFn: ({ signal, pageParam }) =>
-      call(listImpressions, { params: { id }, query: { limit: 50, ...(pageParam && { cursor: pageParam }) }, signal }),
+      call(listImpressions, {
+        params: { id },
+        query: { limit: 50, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
   });

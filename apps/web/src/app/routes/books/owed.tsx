@@ -1,3 +1,4 @@
+import type { AgeBand } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Card } from '../../../components/card.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
@@ -15,6 +16,14 @@ export async function loader() {
   await queryClient.ensureQueryData(owedQuery());
   return null;
 }
+
+const bandWords: Record<AgeBand, string> = {
+  'not due': 'Not due yet',
+  '1 to 30': '1 to 30 days',
+  '31 to 60': '31 to 60 days',
+  '61 to 90': '61 to 90 days',
+  'over 90': 'Over 90 days',
+};
 
 const counted = (count: number) => `${count} ${count === 1 ? 'invoice' : 'invoices'}`;
 
@@ -34,7 +43,7 @@ export function Component() {
           <KeyFigures
             figures={[
               ...owed.bands.map(({ band, count, open }) => ({
-                word: band === 'not due' ? 'Not due yet' : `${band} days`,
+                word: bandWords[band],
                 figure: moneyText(open),
                 note: counted(count),
               })),

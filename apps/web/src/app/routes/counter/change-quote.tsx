@@ -55,7 +55,7 @@ export function Component() {
         onReload={reload}
         onSend={async (body) => {
           const ifMatch = client.getQueryData<Quote>(queryKey)?.version ?? opened.version;
-          await change.mutateAsync({ params: { id }, body, ifMatch });
+          client.setQueryData(queryKey, await change.mutateAsync({ params: { id }, body, ifMatch }));
           say(`Quote ${number} is worked out again.`);
           await navigate(`/counter/quotes/${id}`);
         }}

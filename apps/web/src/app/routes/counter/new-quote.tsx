@@ -7,7 +7,7 @@ import { AddCustomerForm } from '../../../features/customers/components/add-cust
 import { customersQuery } from '../../../features/customers/customers.queries.ts';
 import { QuoteForm, type TypedQuote } from '../../../features/quotes/components/quote-form.tsx';
 import { useCreateQuote } from '../../../features/quotes/quotes.mutations.ts';
-import { patternChoicesQuery } from '../../../features/quotes/quotes.queries.ts';
+import { patternChoicesQuery, quoteQuery } from '../../../features/quotes/quotes.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { customerChoices } from './customer-choices.ts';
 
@@ -37,6 +37,7 @@ export function Component() {
         cancelTo="/counter/quotes"
         onSend={async (body) => {
           const quote = await create.mutateAsync({ body });
+          queryClient.setQueryData(quoteQuery(quote.id).queryKey, quote);
           say(`Quote ${quote.number} is drafted.`);
           await navigate(`/counter/quotes/${quote.id}`);
         }}

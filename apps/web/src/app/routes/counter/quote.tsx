@@ -4,6 +4,7 @@ import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-r
 import { PageTitle } from '../../../components/page-title.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
+import { CanWeMakeIt } from '../../../features/orders/components/can-we-make-it.tsx';
 import { CustomerAnswer } from '../../../features/quotes/components/customer-answer.tsx';
 import { LayoutCard } from '../../../features/quotes/components/layout-card.tsx';
 import { OnePieceCard } from '../../../features/quotes/components/one-piece-card.tsx';
@@ -58,6 +59,9 @@ export function Component() {
         <div className="space-y-5 lg:col-span-2 xl:col-span-1">
           <CustomerAnswer quote={quote} quantity={quantity} isOwner={isOwner} />
           {isOwner && quote.state !== 'agreed' && <AcceptRun quote={quote} quantity={quantity} />}
+          {session.person?.role === 'maker' && (
+            <CanWeMakeIt quoteId={quote.id} quantity={quantity} by={quote.inHandsOn ?? undefined} />
+          )}
           <OtherRevisions quote={quote} />
         </div>
       </div>

@@ -5,7 +5,10 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { say } from '../../../components/toast.ts';
 import { AddToolForm } from '../../../features/tools/components/add-tool-form.tsx';
 import { toolTitle } from '../../../features/tools/tool-words.ts';
-import { customerChoicesQuery, patternChoicesQuery } from '../../../features/tools/tools.queries.ts';
+import {
+  customerChoicesQuery,
+  patternChoicesQuery,
+} from '../../../features/tools/tools.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 
 export async function loader() {
@@ -28,7 +31,9 @@ export function Component() {
           patternId={pattern === null ? null : Number(pattern)}
           onAdded={(tool) => {
             say(`${toolTitle(tool)} is ${tool.state}.`);
-            void navigate(pattern === null ? '/pattern-room/tooling' : `/pattern-room/patterns/${pattern}`);
+            void navigate(
+              pattern === null ? '/pattern-room/tooling' : `/pattern-room/patterns/${pattern}`,
+            );
           }}
         />
       </Card>

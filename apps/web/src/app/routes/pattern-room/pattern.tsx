@@ -47,7 +47,11 @@ export function Component() {
         <div className="grid gap-5">
           <Card title="What it takes">
             {outlinePath !== null && (
-              <OutlinePicture outlinePath={outlinePath} title={`Outline of ${name}`} className="mb-5 max-w-48" />
+              <OutlinePicture
+                outlinePath={outlinePath}
+                title={`Outline of ${name}`}
+                className="mb-5 max-w-48"
+              />
             )}
             <WhatItTakes pattern={pattern} />
           </Card>
@@ -80,7 +84,11 @@ function Tooling({ pattern, isOwner }: { pattern: Pattern; isOwner: boolean }) {
   return (
     <Card
       title="Tooling for it"
-      aside={isOwner && <TextLink to={`/pattern-room/tooling/new?pattern=${pattern.id}`}>Add a tool</TextLink>}
+      aside={
+        isOwner && (
+          <TextLink to={`/pattern-room/tooling/new?pattern=${pattern.id}`}>Add a tool</TextLink>
+        )
+      }
     >
       <ToolsTable
         brief

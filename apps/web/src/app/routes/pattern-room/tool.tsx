@@ -26,7 +26,10 @@ export function Component() {
   const { data: session } = useSuspenseQuery(sessionQuery());
   return (
     <>
-      <PageHeader title={`${toolTitle(tool)}, ${tool.name}`} subtitle={<StateMark state={tool.state} />} />
+      <PageHeader
+        title={`${toolTitle(tool)}, ${tool.name}`}
+        subtitle={<StateMark state={tool.state} />}
+      />
       <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
         <div className="grid gap-5">
           <Card title="On the rack">
@@ -40,7 +43,10 @@ export function Component() {
         </div>
         <div className="grid gap-5">
           {tool.state === 'on the rack' && (
-            <Card title={`Count ${usesWord(tool.kind)}`} subtitle="made outside a job; the bench counts its own">
+            <Card
+              title={`Count ${usesWord(tool.kind)}`}
+              subtitle="made outside a job; the bench counts its own"
+            >
               <CountForm tool={tool} />
             </Card>
           )}

@@ -31,8 +31,8 @@ export function Component() {
         rows={tools.items}
         empty={
           <EmptyState title="No cutting dies or stamp plates yet." action={add}>
-            Keep them here with what they cost, how long they last and where they lie; the bench then counts every cut
-            and impression.
+            Keep them here with what they cost, how long they last and where they lie; the bench
+            then counts every cut and impression.
           </EmptyState>
         }
       />

@@ -16,6 +16,7 @@ import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { choicesOf } from './choices.ts';
+import { ItemLayout } from './item-layout.tsx';
 import { useRole } from './use-role.ts';
 
 export async function loader({ params }: LoaderFunctionArgs) {
@@ -42,35 +43,38 @@ export function Component() {
         subtitle={hardware.short ? <StateMark state="short" /> : hardware.kind}
         action={handlesStock && <Actions id={id} isOwner={isOwner} />}
       />
-      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)]">
-        <div className="grid gap-5">
+      <ItemLayout
+        facts={
           <Card title="How many">
             <HardwareFacts hardware={hardware} />
           </Card>
-          <Card title="Movements">
-            <MovementsTable item={item} />
-          </Card>
-        </div>
-        <div className="grid gap-5">
-          <Card title="Held for jobs">
-            <HeldList item={item} mayOpenJobs={handlesStock} />
-          </Card>
-          {handlesStock && (
-            <Card title="Adjust" subtitle="to what is really there">
-              <AdjustForm key={id} item={{ of: 'hardware', hardwareId: id }} />
+        }
+        aside={
+          <>
+            <Card title="Held for jobs">
+              <HeldList item={item} mayOpenJobs={handlesStock} />
             </Card>
-          )}
-          {isOwner && (
-            <Card title="Change it">
-              <ChangeHardwareForm
-                key={id}
-                hardware={hardware}
-                suppliers={choicesOf(suppliers.items)}
-              />
-            </Card>
-          )}
-        </div>
-      </div>
+            {handlesStock && (
+              <Card title="Adjust" subtitle="to what is really there">
+                <AdjustForm key={id} item={{ of: 'hardware', hardwareId: id }} />
+              </Card>
+            )}
+          </>
+        }
+      >
+        <Card title="Movements">
+          <MovementsTable item={item} />
+        </Card>
+        {isOwner && (
+          <Card title="Change it">
+            <ChangeHardwareForm
+              key={id}
+              hardware={hardware}
+              suppliers={choicesOf(suppliers.items)}
+            />
+          </Card>
+        )}
+      </ItemLayout>
     </>
   );
 }

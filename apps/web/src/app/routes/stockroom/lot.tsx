@@ -4,7 +4,6 @@ import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
-import { TextLink } from '../../../components/text-link.tsx';
 import { Ticket } from '../../../components/ticket.tsx';
 import { ChangeLotForm } from '../../../features/lots/components/change-lot-form.tsx';
 import { LotFacts } from '../../../features/lots/components/lot-facts.tsx';
@@ -16,6 +15,7 @@ import { MovementsTable } from '../../../features/stock/components/movements-tab
 import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
+import { ItemLayout } from './item-layout.tsx';
 import { useRole } from './use-role.ts';
 
 export async function loader({ params }: LoaderFunctionArgs) {
@@ -41,38 +41,36 @@ export function Component() {
         level={1}
         number={lot.tag}
         title={lot.leatherName}
-        detail={
-          <>
-            {formText(lot, lengthUnit)} ·{' '}
-            <TextLink to={`/stockroom/leather/${lot.leatherId}`}>this leather</TextLink>
-          </>
-        }
+        detail={formText(lot, lengthUnit)}
       />
-      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,24rem)]">
-        <div className="grid gap-5">
+      <ItemLayout
+        facts={
           <Card title="What is left">
             <LotFacts lot={lot} />
           </Card>
-          <Card title="Movements">
-            <MovementsTable item={item} />
-          </Card>
-        </div>
-        <div className="grid gap-5">
-          <Card title="Held for jobs">
-            <HeldList item={item} mayOpenJobs={handlesStock} />
-          </Card>
-          {handlesStock && (
-            <>
+        }
+        aside={
+          <>
+            <Card title="Held for jobs">
+              <HeldList item={item} mayOpenJobs={handlesStock} />
+            </Card>
+            {handlesStock && (
               <Card title="Adjust" subtitle="to what is really there">
                 <AdjustForm key={id} item={{ of: 'lot', lotId: id }} />
               </Card>
-              <Card title="Where it lies">
-                <ChangeLotForm key={id} lot={lot} />
-              </Card>
-            </>
-          )}
-        </div>
-      </div>
+            )}
+          </>
+        }
+      >
+        <Card title="Movements">
+          <MovementsTable item={item} />
+        </Card>
+        {handlesStock && (
+          <Card title="Where it lies">
+            <ChangeLotForm key={id} lot={lot} />
+          </Card>
+        )}
+      </ItemLayout>
     </div>
   );
 }

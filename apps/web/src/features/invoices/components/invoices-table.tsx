@@ -6,7 +6,7 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { InvoiceStateMark } from './invoice-state.tsx';
-import { sumMoney } from './sum-money.ts';
+import { sumMoney } from '../../../lib/sum-money.ts';
 
 function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
   const day = (text: string | null) => (text === null ? '–' : dayText(text, today));

@@ -6,7 +6,7 @@ import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { countText, dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { sumMoney } from './sum-money.ts';
+import { sumMoney } from '../../../lib/sum-money.ts';
 
 function columnsFor({ currency, today }: Workshop): Column<OwedInvoice>[] {
   return [

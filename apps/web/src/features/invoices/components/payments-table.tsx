@@ -5,7 +5,7 @@ import { DataTable } from '../../../components/data-table.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { sumMoney } from './sum-money.ts';
+import { sumMoney } from '../../../lib/sum-money.ts';
 
 function columnsFor({ currency, today }: Workshop, ofOneInvoice: boolean): Column<Payment>[] {
   const invoice: Column<Payment>[] = [

@@ -11,6 +11,7 @@ import { StepCounter } from './step-counter.tsx';
 interface StepCardProps {
   step: JobStep;
   perRow: number | null;
+  perContainer: number;
   open: boolean;
   canLog: boolean;
   onToggle: () => void;

@@ -5,17 +5,19 @@ import { Notice } from '../../../components/notice.tsx';
 import type { LogBody } from '../log-outbox.ts';
 import { draftInWords, isMinutes, minutesToSend, useStepDraft, type StepDraft } from '../step-draft.ts';
 import type { Refused } from '../use-log-outbox.ts';
+import { QuickButtons } from './quick-buttons.tsx';
 import { StepMinutes } from './step-minutes.tsx';
 
 interface StepCounterProps {
   step: JobStep;
   perRow: number | null;
+  perContainer: number;
   refused: Refused | undefined;
   onLog: (body: LogBody) => void;
 }
 
 /** For one thumb and wet hands: count, spoil, log. A tap too many is taken back with the minus. */
-export function StepCounter({ step, perRow, refused, onLog }: StepCounterProps) {
+export function StepCounter({ step, perRow, perContainer, refused, onLog }: StepCounterProps) {
   const { draft, change, clear } = useStepDraft(step.id);
   const words = draftInWords(draft);
   const left = step.limit - step.good - step.rejects - step.seconds - draft.good - draft.rejects - draft.seconds;
@@ -30,7 +32,7 @@ export function StepCounter({ step, perRow, refused, onLog }: StepCounterProps) 
     <div className="space-y-3">
       {refused && <RefusedNotice refused={refused} onBack={(counts) => change(counts)} />}
       <Tally step={step} draft={draft} left={left} onGood={(good) => change({ good })} />
-      <QuickButtons step={step} perRow={perRow} left={left} draft={draft} change={change} />
+      <QuickButtons {...{ step, perRow, perContainer, left, draft, change }} />
       <StepMinutes draft={draft} change={change} />
       {words !== '' && (
         <Button tone="primary" size="bench" className="w-full" onClick={send} disabled={!isMinutes(draft.minutes)}>
@@ -65,51 +67,6 @@ function Tally({ step, draft, left, onGood }: TallyProps) {
         of {step.limit}
         {left > 0 && `, ${left} to go`}
       </span>
-    </div>
-  );
-}
-
-interface QuickButtonsProps {
-  step: JobStep;
-  perRow: number | null;
-  left: number;
-  draft: StepDraft;
-  change: (changes: Partial<StepDraft>) => void;
-}
-
-function QuickButtons({ step, perRow, left, draft, change }: QuickButtonsProps) {
-  const inPieces = step.per === 'piece' || step.per === 'strike';
-  const row = inPieces && perRow !== null && perRow > 1 ? Math.min(perRow, left) : 0;
-  return (
-    <div className="flex flex-wrap gap-2.5">
-      <Button size="bench" className="grow" disabled={left <= 0} onClick={() => change({ rejects: draft.rejects + 1 })}>
-        Reject
-      </Button>
-      {inPieces && (
-        <Button size="bench" className="grow" disabled={left <= 0} onClick={() => change({ seconds: draft.seconds + 1 })}>
-          Second
-        </Button>
-      )}
-      {row > 1 && (
-        <Button size="bench" tone="primary" className="grow-3" onClick={() => change({ good: draft.good + row })}>
-          + row of {row}
-        </Button>
-      )}
-      {left > 1 && left !== row && (
-        <Button size="bench" className="grow" onClick={() => change({ good: draft.good + left })}>
-          + all {left}
-        </Button>
-      )}
-      {step.rejects + draft.rejects > 0 && (
-        <Button size="bench" onClick={() => change({ rejects: draft.rejects - 1 })}>
-          − 1 reject
-        </Button>
-      )}
-      {step.seconds + draft.seconds > 0 && (
-        <Button size="bench" onClick={() => change({ seconds: draft.seconds - 1 })}>
-          − 1 second
-        </Button>
-      )}
     </div>
   );
 }

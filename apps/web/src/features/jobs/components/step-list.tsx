@@ -26,6 +26,7 @@ export function StepList({ job, waiting, refused, canLog, onLog }: StepListProps
           <StepCard
             step={withWaiting(step, waiting)}
             perRow={job.layout.piecesPerRow}
+            perContainer={job.layout.pieces}
             open={canLog && step.id === open}
             canLog={canLog}
             onToggle={() => setChosen(step.id === open ? null : step.id)}

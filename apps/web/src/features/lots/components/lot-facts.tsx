@@ -32,6 +32,12 @@ export function LotFacts({ lot }: { lot: Lot }) {
       />
       <KeyFigures
         figures={[
+          {
+            word: 'Leather',
+            figure: (
+              <TextLink to={`/stockroom/leather/${lot.leatherId}`}>{lot.leatherName}</TextLink>
+            ),
+          },
           { word: 'Place', figure: given(lot.place) },
           { word: 'Shade', figure: given(lot.shade) },
           { word: 'Grade', figure: given(lot.grade) },

@@ -17,7 +17,9 @@ export function OfferAgreed({ offer }: { offer: Offer }) {
         {offer.tooling.map((tool) => (
           <Line key={tool.name} word={`${tool.name}, charged once`} amount={tool.charge} />
         ))}
-        <Stitch className="my-2" />
+      </dl>
+      <Stitch className="my-2" />
+      <dl>
         <Line word={`together, in ${offer.currency}`} amount={rung.total} strong />
       </dl>
       <p className="mt-3">{`${offer.shopName} has your answer and will confirm the day to you.`}</p>

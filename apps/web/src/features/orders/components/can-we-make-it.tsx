@@ -23,7 +23,7 @@ interface CanWeMakeItProps {
 export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProps) {
   const { today } = useWorkshop();
   const id = useId();
-  const [chosen, setChosen] = useState(by);
+  const [chosen, setChosen] = useState(by !== undefined && by >= today ? by : undefined);
   const { data: check, error, isFetching } = useQuery(checkQuery(quoteId, { quantity, by: chosen }));
   return (
     <Card title="Can we make it?">

@@ -19,7 +19,11 @@ export function OrderTicket({ order, actions }: { order: Order; actions?: ReactN
         facts={
           <>
             <TicketFact word="State">
-              <StateMark state={order.state} />
+              <span className="flex flex-wrap gap-1.5">
+                {statesOf(order).map((state) => (
+                  <StateMark key={state} state={state} />
+                ))}
+              </span>
             </TicketFact>
             <TicketFact word="Promised">{dayText(order.promisedOn, today)}</TicketFact>
             {order.inHandsOn !== null && <TicketFact word="In hands">{dayText(order.inHandsOn, today)}</TicketFact>}
@@ -31,3 +35,7 @@ export function OrderTicket({ order, actions }: { order: Order; actions?: ReactN
     </>
   );
 }
+
+/** What is awaited shows as several at once. */
+const statesOf = ({ awaits, state }: Order): string[] =>
+  awaits.length > 0 ? awaits.map((what) => `awaiting ${what}`) : [state];

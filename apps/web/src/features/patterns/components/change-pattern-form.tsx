@@ -33,7 +33,9 @@ export function ChangePatternForm({ pattern, onChanged }: ChangePatternFormProps
       onReload={reload}
       onSend={async (typed) => {
         const ifMatch = client.getQueryData<Pattern>(queryKey)?.version ?? pattern.version;
-        onChanged(await send.mutateAsync({ params: { id: pattern.id }, body: sentPattern(typed), ifMatch }));
+        onChanged(
+          await send.mutateAsync({ params: { id: pattern.id }, body: sentPattern(typed), ifMatch }),
+        );
       }}
     >
       <PatternFields />

@@ -11,13 +11,21 @@ const forms = [
 /** What the pieces are cut from, how far apart, and how far from its edge. */
 export function ContainerFields() {
   const form = useFreshErrors('definition.container', 'form');
-  const long = form === 'strip' ? { name: 'lengthMm', label: 'Length' } : { name: 'heightMm', label: 'Height' };
+  const long =
+    form === 'strip'
+      ? { name: 'lengthMm', label: 'Length' }
+      : { name: 'heightMm', label: 'Height' };
   return (
     <>
       <RadioCards name="definition.container.form" label="Cut from" cards={forms} across />
       <FieldRow>
         <LengthField name="definition.container.widthMm" label="Width" whenEmpty="text" />
-        <LengthField key={form} name={`definition.container.${long.name}`} label={long.label} whenEmpty="text" />
+        <LengthField
+          key={form}
+          name={`definition.container.${long.name}`}
+          label={long.label}
+          whenEmpty="text"
+        />
       </FieldRow>
     </>
   );
@@ -27,7 +35,12 @@ export function ContainerFields() {
 export function ClearanceFields() {
   return (
     <FieldRow>
-      <LengthField name="definition.spacingMm" label="Spacing" help="between two cuts" whenEmpty="text" />
+      <LengthField
+        name="definition.spacingMm"
+        label="Spacing"
+        help="between two cuts"
+        whenEmpty="text"
+      />
       <LengthField name="definition.trimMm" label="Trim" help="unused border" whenEmpty="text" />
     </FieldRow>
   );

@@ -24,7 +24,9 @@ export function HardwareFields() {
   return (
     <fieldset>
       <legend className="mb-1 text-lg font-semibold">Hardware and supplies</legend>
-      <p className="mb-3 text-sm text-ink-soft">What goes on each piece; leave it empty where there is none.</p>
+      <p className="mb-3 text-sm text-ink-soft">
+        What goes on each piece; leave it empty where there is none.
+      </p>
       <div className="space-y-3">
         {fields.map((field, at) => (
           <div key={field.id} className="flex flex-wrap items-start gap-x-4 gap-y-2">
@@ -48,7 +50,10 @@ export function HardwareFields() {
           <Button
             tone="quiet"
             onClick={() =>
-              append({ hardwareId: '', perPiece: 1 }, { focusName: `${name}.${fields.length}.hardwareId` })
+              append(
+                { hardwareId: '', perPiece: 1 },
+                { focusName: `${name}.${fields.length}.hardwareId` },
+              )
             }
           >
             <Plus size={18} aria-hidden="true" /> Hardware from the list

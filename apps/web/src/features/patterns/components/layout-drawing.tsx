@@ -18,7 +18,8 @@ export function LayoutDrawing({ layout, outlinePath, name }: LayoutDrawingProps)
   const workshop = useWorkshop();
   const { container } = layout;
   const heightMm = container.form === 'panel' ? container.heightMm : container.widthMm;
-  const widthMm = container.form === 'panel' ? container.widthMm : (container.lengthMm ?? container.widthMm);
+  const widthMm =
+    container.form === 'panel' ? container.widthMm : (container.lengthMm ?? container.widthMm);
   return (
     <div className="space-y-4">
       {layout.pieces === 0 && <NothingFits form={container.form} />}
@@ -39,8 +40,8 @@ export function LayoutDrawing({ layout, outlinePath, name }: LayoutDrawingProps)
 function NothingFits({ form }: { form: 'panel' | 'strip' }) {
   return (
     <Notice tone="attention" title="Not one piece fits.">
-      Make the {form} larger, or the outline, spacing or trim smaller. It can be kept as it is, but no quote can be made
-      of it.
+      Make the {form} larger, or the outline, spacing or trim smaller. It can be kept as it is, but
+      no quote can be made of it.
     </Notice>
   );
 }

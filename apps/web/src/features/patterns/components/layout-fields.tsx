@@ -4,8 +4,8 @@ import { LengthField } from '../../../components/length-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
 import { ClearanceFields, ContainerFields } from './container-fields.tsx';
-import { OutlineFields } from './outline-fields.tsx';
 import { FieldRow } from './field-row.tsx';
+import { OutlineFields } from './outline-fields.tsx';
 
 const ways = [
   { value: 'outline', label: 'From its outline', detail: 'laid out and drawn to scale' },
@@ -37,8 +37,18 @@ function HandCountFields() {
     <>
       <FieldRow>
         <NumberField name="definition.handCount.pieces" label="Pieces" whenEmpty="text" />
-        <LengthField name="definition.handCount.widthMm" label="from a panel of" help="width" whenEmpty="text" />
-        <LengthField name="definition.handCount.heightMm" label="by" help="height; 4 3/8 is fine" whenEmpty="text" />
+        <LengthField
+          name="definition.handCount.widthMm"
+          label="from a panel of"
+          help="width"
+          whenEmpty="text"
+        />
+        <LengthField
+          name="definition.handCount.heightMm"
+          label="by"
+          help="height; 4 3/8 is fine"
+          whenEmpty="text"
+        />
       </FieldRow>
       <Checkbox name="definition.alsoDrawn" label="Draw the outline too; the count still holds" />
       {alsoDrawn && <OutlineFields />}

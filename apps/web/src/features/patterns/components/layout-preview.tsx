@@ -1,4 +1,10 @@
-import { layoutAsked, layoutSourceOf, outline, outlineOf, type LayoutSource } from '@hidewright/contract';
+import {
+  layoutAsked,
+  layoutSourceOf,
+  outline,
+  outlineOf,
+  type LayoutSource,
+} from '@hidewright/contract';
 import { outlinePath } from '@hidewright/domain';
 import { useWatch } from 'react-hook-form';
 import { Card } from '../../../components/card.tsx';
@@ -21,8 +27,12 @@ export function LayoutPreview() {
   return (
     <Card title="Layout" subtitle={layout ? layoutSubtitle(layout) : undefined}>
       <div aria-busy={working} className="space-y-5">
-        {path !== null && <OutlinePicture outlinePath={path} title="The outline" className="mx-auto max-w-48" />}
-        {answer !== undefined && 'refusal' in answer && <Notice tone="attention">{answer.refusal}</Notice>}
+        {path !== null && (
+          <OutlinePicture outlinePath={path} title="The outline" className="mx-auto max-w-48" />
+        )}
+        {answer !== undefined && 'refusal' in answer && (
+          <Notice tone="attention">{answer.refusal}</Notice>
+        )}
         {layout !== undefined && (
           <div className={working ? 'opacity-60' : undefined}>
             <LayoutDrawing layout={layout} outlinePath={drawnIn(source, path)} name={name} />
@@ -30,7 +40,9 @@ export function LayoutPreview() {
         )}
         {answer === undefined && (
           <p className="text-ink-soft">
-            {working ? 'Laying the pieces out …' : 'Type the measures, and the pieces are laid out here.'}
+            {working
+              ? 'Laying the pieces out …'
+              : 'Type the measures, and the pieces are laid out here.'}
           </p>
         )}
       </div>

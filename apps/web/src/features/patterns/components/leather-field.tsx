@@ -23,7 +23,10 @@ export function LeatherField() {
   };
   const chosen = Number(useWatch({ name }));
   const leather = leathers.find(({ id }) => id === chosen);
-  const price = leather?.pricePerFt2 === undefined ? '' : `${unitPriceText(leather.pricePerFt2)} ${currency} per ft²`;
+  const price =
+    leather?.pricePerFt2 === undefined
+      ? ''
+      : `${unitPriceText(leather.pricePerFt2)} ${currency} per ft²`;
   return (
     <div>
       {/* A new list is a new field: a chosen leather must stand among its choices before it can be shown. */}

@@ -10,7 +10,11 @@ const shapes = [
   { value: 'tag', label: 'Tag', detail: 'with a neck' },
 ];
 
-const cornerRadius = { name: 'cornerRadiusMm', label: 'Corner radius', help: '0 for sharp corners' };
+const cornerRadius = {
+  name: 'cornerRadiusMm',
+  label: 'Corner radius',
+  help: '0 for sharp corners',
+};
 const measures: Record<string, readonly { name: string; label: string; help?: string }[]> = {
   round: [{ name: 'diameterMm', label: 'Diameter' }],
   rectangle: [
@@ -39,7 +43,12 @@ export function OutlineFields() {
       <RadioCards name="definition.outline.shape" label="Outline" cards={shapes} across />
       <FieldRow>
         {(measures[shape] ?? []).map(({ name, ...labels }) => (
-          <LengthField key={`${shape} ${name}`} name={`definition.outline.${name}`} whenEmpty="text" {...labels} />
+          <LengthField
+            key={`${shape} ${name}`}
+            name={`definition.outline.${name}`}
+            whenEmpty="text"
+            {...labels}
+          />
         ))}
       </FieldRow>
     </>

@@ -37,7 +37,13 @@ const columns: Column<PatternSummary>[] = [
     cell: (row) => (row.yieldPercent === null ? '' : percentText(row.yieldPercent)),
     align: 'right',
   },
-  { id: 'version', header: 'Version', value: (row) => row.versionNumber, align: 'right', onPhone: 'hidden' },
+  {
+    id: 'version',
+    header: 'Version',
+    value: (row) => row.versionNumber,
+    align: 'right',
+    onPhone: 'hidden',
+  },
   {
     id: 'standing',
     header: 'Standing',
@@ -47,7 +53,13 @@ const columns: Column<PatternSummary>[] = [
   },
 ];
 
-export function PatternsTable({ rows, empty }: { rows: readonly PatternSummary[]; empty: ReactNode }) {
+export function PatternsTable({
+  rows,
+  empty,
+}: {
+  rows: readonly PatternSummary[];
+  empty: ReactNode;
+}) {
   return (
     <DataTable
       label="Patterns"

@@ -7,8 +7,8 @@ import { DecimalField } from '../../../components/decimal-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { blankStep } from '../typed-pattern.ts';
-import { RemoveButton } from './remove-button.tsx';
 import { FieldRow } from './field-row.tsx';
+import { RemoveButton } from './remove-button.tsx';
 
 const name = 'definition.work.steps';
 const perChoices = stepUnits.map((unit) => ({ value: unit, label: `per ${unit}` }));
@@ -23,8 +23,14 @@ export function StepFields() {
         {fields.map((field, at) => (
           <StepRow key={field.id} at={at}>
             <MoveButton up at={at} disabled={at === 0} onMove={() => move(at, at - 1)} />
-            <MoveButton at={at} disabled={at === fields.length - 1} onMove={() => move(at, at + 1)} />
-            {fields.length > 1 && <RemoveButton label={`Remove step ${at + 1}`} onRemove={() => remove(at)} />}
+            <MoveButton
+              at={at}
+              disabled={at === fields.length - 1}
+              onMove={() => move(at, at + 1)}
+            />
+            {fields.length > 1 && (
+              <RemoveButton label={`Remove step ${at + 1}`} onRemove={() => remove(at)} />
+            )}
           </StepRow>
         ))}
       </ol>
@@ -51,12 +57,14 @@ function StepRow({ at, children }: { at: number; children: ReactNode }) {
         </div>
         <div className="flex">{children}</div>
       </div>
-      <FieldRow>
-        <DecimalField name={field('setupMinutes')} label="Setup" unit="min" />
-        <DecimalField name={field('secondsPerUnit')} label="Each takes" unit="s" />
-        <SelectField name={field('per')} label="Counted" choices={perChoices} short />
-        <DecimalField name={field('rejectPercent')} label="Rejects" unit="%" />
-      </FieldRow>
+      <div className="mt-3">
+        <FieldRow>
+          <DecimalField name={field('setupMinutes')} label="Setup" unit="min" />
+          <DecimalField name={field('secondsPerUnit')} label="Each takes" unit="s" />
+          <SelectField name={field('per')} label="Counted" choices={perChoices} short />
+          <DecimalField name={field('rejectPercent')} label="Rejects" unit="%" />
+        </FieldRow>
+      </div>
     </li>
   );
 }

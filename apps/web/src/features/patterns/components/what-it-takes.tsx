@@ -6,7 +6,9 @@ import { StepsTable } from './steps-table.tsx';
 /** Leather, hardware, work and tooling of a pattern, in words. */
 export function WhatItTakes({ pattern }: { pattern: Pattern }) {
   const { work, needsDie, needsPlate } = pattern.definition;
-  const tooling = [needsDie && 'cutting die', needsPlate && 'stamp plate'].filter((each) => each !== false);
+  const tooling = [needsDie && 'cutting die', needsPlate && 'stamp plate'].filter(
+    (each) => each !== false,
+  );
   return (
     <div className="space-y-5">
       <dl className="grid grid-cols-[auto_1fr] gap-x-6 gap-y-2">

@@ -52,6 +52,7 @@ function Locked({ sheet, period }: { sheet: SalesSheet; period: Period }) {
 }
 
 function Lockable({ sheet }: { sheet: SalesSheet }) {
+  const { today } = useWorkshop();
   const [asking, setAsking] = useState(false);
   const lock = useLockPeriod();
   const { fromDay, toDay, totals, currency } = sheet;
@@ -74,8 +75,10 @@ function Lockable({ sheet }: { sheet: SalesSheet }) {
         }}
       >
         Nobody can issue an invoice or record a payment on these days afterwards, and they cannot be
-        opened again. They are kept with a total of {moneyText(totals.total)} {currency}, of which
-        tax {moneyText(totals.tax)}, and {moneyText(totals.received)} received.
+        opened again.
+        {toDay === today && ' That includes today: nothing more can be entered until tomorrow.'} They
+        are kept with a total of {moneyText(totals.total)} {currency}, of which tax{' '}
+        {moneyText(totals.tax)}, and {moneyText(totals.received)} received.
       </ConfirmDialog>
     </>
   );

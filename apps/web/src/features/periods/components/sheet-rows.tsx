@@ -1,13 +1,11 @@
 import type { SalesSheet, SheetInvoice, SheetPayment } from '@hidewright/contract';
-import { Decimal } from 'decimal.js';
 import { useMemo } from 'react';
 import { Card } from '../../../components/card.tsx';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { dayText, moneyText } from '../../../lib/formatting.ts';
+import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-
-const sum = (amounts: readonly string[]) => moneyText(Decimal.sum(0, ...amounts).toFixed(2));
 
 function amountColumn<Row>(id: string, header: string, amount: (row: Row) => string): Column<Row> {
   return {
@@ -16,7 +14,7 @@ function amountColumn<Row>(id: string, header: string, amount: (row: Row) => str
     value: amount,
     cell: (row) => moneyText(amount(row)),
     align: 'right',
-    total: (rows) => sum(rows.map(amount)),
+    total: (rows) => sumMoney(rows.map(amount)),
   };
 }
 

@@ -23,7 +23,7 @@ export function CustomerField({ choices, newCustomer }: CustomerFieldProps) {
   }, [added, choices, setValue]);
 
   return (
-    <div className="flex flex-wrap items-end gap-3">
+    <div className="flex flex-wrap items-start gap-3">
       <div className="min-w-56 grow">
         <SelectField
           name="customerId"
@@ -32,7 +32,7 @@ export function CustomerField({ choices, newCustomer }: CustomerFieldProps) {
           placeholder={choices.length === 0 ? 'Nobody yet: add the first' : 'Choose a customer'}
         />
       </div>
-      <Button className="min-h-10" onClick={() => setOpen(true)}>
+      <Button className="min-h-10 sm:mt-7" onClick={() => setOpen(true)}>
         New customer
       </Button>
       <Dialog open={open} onOpenChange={setOpen} title="New customer">

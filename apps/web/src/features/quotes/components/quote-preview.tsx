@@ -6,6 +6,10 @@ import { LayoutCard } from './layout-card.tsx';
 import { OnePieceCard } from './one-piece-card.tsx';
 import { PriceBreaksCard } from './price-breaks-card.tsx';
 
+/** Below the fields; where there is room, beside them, and in sight while they are typed. */
+const beside =
+  'grid items-start gap-5 lg:grid-cols-2 xl:sticky xl:top-4 xl:-m-1 xl:max-h-[calc(100dvh-2rem)] xl:grid-cols-1 xl:overflow-y-auto xl:p-1';
+
 /** What the quote would look like if it were saved now. */
 export function QuotePreview({ basis, preview }: PreviewSoFar) {
   const [picked, setPicked] = useState<number>();
@@ -22,7 +26,7 @@ export function QuotePreview({ basis, preview }: PreviewSoFar) {
   );
   if ('why' in preview) {
     return (
-      <div className="grid gap-5 lg:grid-cols-2 xl:grid-cols-1">
+      <div className={beside}>
         <Notice tone="info">{preview.why}</Notice>
         {layout}
       </div>
@@ -31,7 +35,7 @@ export function QuotePreview({ basis, preview }: PreviewSoFar) {
   const { numbers, input } = preview;
   const rung = rungAt(numbers.breaks, picked);
   return (
-    <div className="grid items-start gap-5 lg:grid-cols-2 xl:grid-cols-1">
+    <div className={beside}>
       {rung && (
         <PriceBreaksCard numbers={numbers} target={input.targetPerHour} chosen={rung.quantity} onChoose={setPicked} />
       )}

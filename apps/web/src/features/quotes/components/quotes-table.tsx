@@ -17,10 +17,11 @@ interface QuotesTableProps {
 
 export function QuotesTable({ rows, withoutCustomer = false, empty, after }: QuotesTableProps) {
   const { today } = useWorkshop();
-  const columns = useMemo(
-    () => columnsFor(today).filter((column) => !(withoutCustomer && column.id === 'customer')),
-    [today, withoutCustomer],
-  );
+  const withoutTotal = rows.every((row) => row.total === undefined);
+  const columns = useMemo(() => {
+    const left = [withoutCustomer && 'customer', withoutTotal && 'total'];
+    return columnsFor(today).filter((column) => !left.includes(column.id));
+  }, [today, withoutCustomer, withoutTotal]);
   return (
     <DataTable
       label="Quotes"

@@ -52,9 +52,7 @@ interface RungRowProps extends RungFieldsProps {
 function RungRow({ at, workedOut, onRemove }: RungRowProps) {
   return (
     <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
-      <div className="w-32">
-        <NumberField name={`breaks.${at}.quantity`} label="Pieces" />
-      </div>
+      <NumberField name={`breaks.${at}.quantity`} label="Pieces" />
       <div>
         <MoneyField name={`breaks.${at}.typedPrice`} label="Your price each" optional whenEmpty="null" />
         <WorkedOutPrice at={at} workedOut={workedOut} />

@@ -49,7 +49,7 @@ export function SendDialog({ quote, open, onOpenChange }: SendDialogProps) {
   }
 
   return (
-    <Dialog open={open} onOpenChange={close} title={isDraft ? `Send quote ${quote.number}` : `Send ${quote.number} again`}>
+    <Dialog open={open} onOpenChange={close} title={handed ? `Pass on quote ${quote.number}` : titleFor(quote)}>
       {problem && (
         <Notice tone="danger" live className="mb-4">
           {problem}
@@ -63,6 +63,9 @@ export function SendDialog({ quote, open, onOpenChange }: SendDialogProps) {
     </Dialog>
   );
 }
+
+const titleFor = ({ state, number }: Quote) =>
+  state === 'draft' ? `Send quote ${number}` : `Send quote ${number} again`;
 
 function Ways({ quote, busy, onGo }: { quote: Quote; busy: boolean; onGo: (by: By) => void }) {
   const byMail = !quote.cannotMail;

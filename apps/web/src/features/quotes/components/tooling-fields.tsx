@@ -24,7 +24,7 @@ export function ToolingFields({ suggestions }: ToolingFieldsProps) {
       <div className="space-y-4">
         {fields.map((field, at) => (
           <div key={field.id} className="flex flex-wrap items-start gap-x-4 gap-y-2">
-            <div className="w-56">
+            <div className="w-full">
               <TextField name={`tooling.${at}.name`} label="Tool" />
             </div>
             <MoneyField name={`tooling.${at}.cost`} label="Costs the shop" />

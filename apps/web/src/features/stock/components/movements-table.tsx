@@ -36,8 +36,13 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMoveme
       align: 'right',
     },
     ...(withValues ? [value] : []),
-    { id: 'for', header: 'For', value: (row) => row.jobNumber ?? row.purchaseOrderNumber },
-    { id: 'reason', header: 'Why', value: (row) => row.reason },
+    {
+      id: 'for',
+      header: 'For',
+      value: (row) => row.jobNumber ?? row.purchaseOrderNumber,
+      cell: (row) => row.jobNumber ?? row.purchaseOrderNumber ?? '–',
+    },
+    { id: 'reason', header: 'Why', value: (row) => row.reason, cell: (row) => row.reason || '–' },
     { id: 'by', header: 'By', value: (row) => row.actorName },
   ];
 }

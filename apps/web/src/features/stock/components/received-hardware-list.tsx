@@ -43,6 +43,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
         {left.map((line) => (
           <Button
             key={line.id}
+            className="min-h-11"
             onClick={() =>
               append(blankHardware(line.hardwareId ?? undefined, line.id, restOf(line)))
             }
@@ -52,6 +53,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
         ))}
         {lines.length === 0 && (
           <Button
+            className="min-h-11"
             onClick={() =>
               append(blankHardware(undefined, null), {
                 focusName: `hardware.${fields.length}.hardwareId`,
@@ -85,7 +87,7 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
     <div
       role="group"
       aria-label={line?.name ?? `Hardware ${at + 1}`}
-      className="rounded border border-stitch bg-paper p-4"
+      className="rounded border border-stitch bg-card p-4 shadow-card"
     >
       <div className="mb-3 flex items-start justify-between gap-4">
         <p className="font-semibold">
@@ -98,10 +100,11 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
         </p>
         <Button
           tone="quiet"
+          className="-mt-2 -mr-2 min-h-11"
           onClick={onRemove}
-          aria-label={`Take out ${line?.name ?? `hardware ${at + 1}`}`}
+          aria-label={`Remove ${line?.name ?? `hardware ${at + 1}`}`}
         >
-          Take it out
+          {line ? 'Did not come' : 'Remove'}
         </Button>
       </div>
       <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">

@@ -48,12 +48,17 @@ export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListPr
       </div>
       <div className="mt-3 flex flex-wrap gap-2">
         {open.map((line) => (
-          <Button key={line.id} onClick={() => add(blankLot(line.leatherId ?? undefined, line.id))}>
+          <Button
+            key={line.id}
+            className="min-h-11"
+            onClick={() => add(blankLot(line.leatherId ?? undefined, line.id))}
+          >
             <Plus size={18} aria-hidden="true" /> A lot of {line.name}
           </Button>
         ))}
         {lines.length === 0 && (
           <Button
+            className="min-h-11"
             onClick={() =>
               append(blankLot(undefined, null), { focusName: `lots.${fields.length}.leatherId` })
             }

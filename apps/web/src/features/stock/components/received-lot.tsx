@@ -30,7 +30,7 @@ export function ReceivedLot({ at, ordered, leathers, mayPrice, onRemove }: Recei
     <div
       role="group"
       aria-label={`Lot ${at + 1}`}
-      className="rounded border border-stitch bg-paper p-4"
+      className="rounded border border-stitch bg-card p-4 shadow-card"
     >
       <div className="mb-3 flex items-start justify-between gap-4">
         <p className="font-semibold">
@@ -39,8 +39,13 @@ export function ReceivedLot({ at, ordered, leathers, mayPrice, onRemove }: Recei
             <span className="block text-sm font-normal text-ink-soft">{ordered.toCome}</span>
           )}
         </p>
-        <Button tone="quiet" onClick={onRemove} aria-label={`Take out lot ${at + 1}`}>
-          Take it out
+        <Button
+          tone="quiet"
+          className="-mt-2 -mr-2 min-h-11"
+          onClick={onRemove}
+          aria-label={`Remove lot ${at + 1}`}
+        >
+          Remove
         </Button>
       </div>
       <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
@@ -84,7 +89,7 @@ function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
     <>
       <Button
         tone="quiet"
-        className="mt-2 -ml-3"
+        className="mt-2 -ml-3 min-h-11"
         aria-expanded={open}
         onClick={() => setAsked(!open)}
       >

@@ -28,7 +28,9 @@ export function ChangeToolForm({ tool }: { tool: ToolReply }) {
       onReload={reload}
       onSend={async (body) => {
         const ifMatch = client.getQueryData<ToolReply>(queryKey)?.version ?? tool.version;
-        say(`${toolTitle(await send.mutateAsync({ params: { id: tool.id }, body, ifMatch }))} is saved.`);
+        say(
+          `${toolTitle(await send.mutateAsync({ params: { id: tool.id }, body, ifMatch }))} is saved.`,
+        );
       }}
     >
       <ToolFields kind={tool.kind} />
@@ -36,6 +38,16 @@ export function ChangeToolForm({ tool }: { tool: ToolReply }) {
   );
 }
 
-function typedOf({ name, number, metal, cost, lifeUses, slot, patternId, customerId, state }: ToolReply) {
+function typedOf({
+  name,
+  number,
+  metal,
+  cost,
+  lifeUses,
+  slot,
+  patternId,
+  customerId,
+  state,
+}: ToolReply) {
   return { name, number, metal, cost, lifeUses, slot, patternId, customerId, state };
 }

@@ -9,10 +9,13 @@ import { usesWord } from '../tool-words.ts';
 
 /** What a tool did and when, newest first. */
 export function ImpressionsList({ tool }: { tool: ToolReply }) {
-  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(impressionsQuery(tool.id));
+  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(
+    impressionsQuery(tool.id),
+  );
   if (!data) return <Skeleton />;
   const rows = data.pages.flatMap((page) => page.items);
-  if (rows.length === 0) return <p className="text-ink-soft">{`No ${usesWord(tool.kind)} are counted on it yet.`}</p>;
+  if (rows.length === 0)
+    return <p className="text-ink-soft">{`No ${usesWord(tool.kind)} are counted on it yet.`}</p>;
   return (
     <>
       <ol className="space-y-2">

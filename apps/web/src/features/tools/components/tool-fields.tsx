@@ -23,7 +23,11 @@ export function ToolFields({ kind, isNew = false }: ToolFieldsProps) {
   const isPlate = kind === 'stamp plate';
   return (
     <>
-      <TextField name="name" label="Name" help={isPlate ? 'such as Heron crest' : 'such as Coaster 95 mm'} />
+      <TextField
+        name="name"
+        label="Name"
+        help={isPlate ? 'such as Heron crest' : 'such as Coaster 95 mm'}
+      />
       <TextField
         name="number"
         label="Number"
@@ -32,7 +36,14 @@ export function ToolFields({ kind, isNew = false }: ToolFieldsProps) {
         help={isNew ? 'Left empty it gets the next one.' : undefined}
       />
       {isPlate && (
-        <SelectField name="metal" label="Metal" placeholder="Choose a metal" whenEmpty="text" choices={metals} short />
+        <SelectField
+          name="metal"
+          label="Metal"
+          placeholder="Choose a metal"
+          whenEmpty="text"
+          choices={metals}
+          short
+        />
       )}
       <MoneyField name="cost" label="Cost" />
       <NumberField
@@ -42,7 +53,13 @@ export function ToolFields({ kind, isNew = false }: ToolFieldsProps) {
         whenEmpty="text"
         help="by your own experience; it can be changed"
       />
-      <TextField name="slot" label="Slot" short optional help="where it lives on the rack, such as C3" />
+      <TextField
+        name="slot"
+        label="Slot"
+        short
+        optional
+        help="where it lives on the rack, such as C3"
+      />
       <SelectField
         key={`patterns ${patterns.length}`}
         name="patternId"

@@ -22,9 +22,24 @@ const columns: Column<ToolReply>[] = [
   },
   { id: 'slot', header: 'Slot', value: (row) => row.slot },
   { id: 'metal', header: 'Metal', value: (row) => row.metal, onPhone: 'hidden' },
-  { id: 'for', header: 'For', value: (row) => [row.patternName, row.customerName].filter(Boolean).join(', ') },
-  { id: 'used', header: 'Used', value: (row) => row.used, cell: (row) => <Wear tool={row} />, align: 'right' },
-  { id: 'state', header: 'State', value: (row) => row.state, cell: (row) => <StateMark state={row.state} /> },
+  {
+    id: 'for',
+    header: 'For',
+    value: (row) => [row.patternName, row.customerName].filter(Boolean).join(', '),
+  },
+  {
+    id: 'used',
+    header: 'Used',
+    value: (row) => row.used,
+    cell: (row) => <Wear tool={row} />,
+    align: 'right',
+  },
+  {
+    id: 'state',
+    header: 'State',
+    value: (row) => row.state,
+    cell: (row) => <StateMark state={row.state} />,
+  },
 ];
 
 const briefColumns = columns.filter(({ id }) => id !== 'for' && id !== 'metal');

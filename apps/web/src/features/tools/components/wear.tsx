@@ -6,10 +6,17 @@ import { usesWord, wearText } from '../tool-words.ts';
 export function Wear({ tool }: { tool: ToolReply }) {
   return (
     <span className="inline-block w-40 text-left">
-      <StitchProgress label={`${usesWord(tool.kind)} used`} done={tool.used} of={tool.lifeUses} stitches={10} />
+      <StitchProgress
+        label={`${usesWord(tool.kind)} used`}
+        done={tool.used}
+        of={tool.lifeUses}
+        stitches={10}
+      />
       <span className="mt-0.5 block text-sm">
         {wearText(tool)} {usesWord(tool.kind)}
-        {tool.usesLeft === 0 && <span className="block font-semibold text-brass">beyond its expected life</span>}
+        {tool.usesLeft === 0 && (
+          <span className="block font-semibold text-brass">beyond its expected life</span>
+        )}
       </span>
     </span>
   );

@@ -1,5 +1,5 @@
 import { Decimal } from 'decimal.js';
-import { moneyText } from '../../../lib/formatting.ts';
+import { moneyText } from './formatting.ts';
 
 /** What a column of amounts adds up to. */
 export const sumMoney = (amounts: readonly string[]): string =>

@@ -1,0 +1,67 @@
+import { afterAll, beforeAll, expect } from 'vitest';
+import { closeBrowser, expectAccessible, walk } from '../support/browser.ts';
+import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import { settled, visit } from '../support/steps.ts';
+
+let hidewright: Hidewright;
+beforeAll(async () => {
+  hidewright = await startHidewright({ mode: 'shop' });
+});
+afterAll(async () => {
+  await closeBrowser();
+  await hidewright.stop();
+});
+
+/** Product.md's ten minutes: the shop's name, a hand count, leather per ft², hardware, minutes per 100, a price of one's own. */
+walk('from an empty shop to a sent quote of an own piece', async ({ page }) => {
+  await page.goto(hidewright.url);
+  await settled(page);
+  await expectAccessible(page);
+  await page.getByLabel('Name of the shop').fill('A Small Bench');
+  await page.getByLabel('Your name').fill('Somebody New');
+  await page.getByLabel('E-mail address').fill('new@example.com');
+  await page.getByLabel('Password').fill('five plain words in a row');
+  await page.getByRole('button', { name: 'Open the shop' }).click();
+  await page.waitForURL('**/today');
+  await settled(page);
+  await expectAccessible(page);
+
+  await page.getByRole('link', { name: /New pattern/ }).click();
+  await settled(page);
+  await page.getByLabel('Name', { exact: true }).fill('Key fob');
+  await page.getByText('Hand count', { exact: false }).first().click();
+  await page.getByLabel(/^Pieces/).fill('21');
+  await page.getByLabel(/width/i).first().fill('279.4');
+  await page.getByLabel(/height/i).first().fill('330.2');
+  await page.getByRole('button', { name: 'New leather' }).click();
+  const leather = page.getByRole('dialog');
+  await leather.getByLabel('Name').fill('Oak tan');
+  await leather.getByLabel(/Price/).fill('10');
+  await leather.getByRole('button', { name: /Add/ }).click();
+  await page.getByLabel(/Minutes per 100/).fill('150');
+  await expectAccessible(page);
+  await page.getByRole('button', { name: /Save|Add the pattern|Keep/ }).click();
+  await page.waitForURL(/\/pattern-room\/patterns\/\d+$/);
+  await settled(page);
+  await expectAccessible(page);
+
+  await visit(page, `${hidewright.url}/counter/quotes/new`);
+  await page.getByRole('button', { name: 'New customer' }).click();
+  const customer = page.getByRole('dialog');
+  await customer.getByLabel('Name', { exact: true }).fill('The first customer');
+  await customer.getByRole('button', { name: /Add/ }).click();
+  await expect.poll(() => page.getByLabel('Customer', { exact: true }).inputValue()).not.toBe('');
+  await page.getByLabel('Pattern', { exact: true }).selectOption({ label: 'Key fob' });
+  await page.getByLabel('Pieces').first().fill('20');
+  await page.getByLabel(/Your price each/).first().fill('4');
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Save the draft' }).click();
+  await page.waitForURL(/\/counter\/quotes\/\d+$/);
+  await settled(page);
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Send quote' }).click();
+  await page.getByRole('button', { name: 'Send by hand' }).click();
+  await page.getByText('/c/').first().waitFor();
+  await page.keyboard.press('Escape');
+  await page.getByText('sent', { exact: true }).first().waitFor();
+});

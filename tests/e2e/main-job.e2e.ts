@@ -1,0 +1,207 @@
+import { afterAll, beforeAll, expect } from 'vitest';
+import type { Page } from 'playwright-core';
+import { browser, closeBrowser, expectAccessible, phone, walk, watch, wide } from '../support/browser.ts';
+import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import { mailThat } from '../support/mailbox.ts';
+import { idIn, settled, signInAs, visit, type Role } from '../support/steps.ts';
+
+const quantity = 60;
+
+let hidewright: Hidewright;
+let complaints: string[];
+
+beforeAll(async () => {
+  hidewright = await startHidewright();
+  complaints = [];
+});
+afterAll(async () => {
+  await closeBrowser();
+  await hidewright.stop();
+});
+
+/** A browser of this person's own, at the width they work at. */
+async function desk(role: Role, viewport = wide): Promise<Page> {
+  const context = await (await browser()).newContext({ viewport, acceptDownloads: true });
+  const page = await context.newPage();
+  complaints = watch(page);
+  await signInAs(page, hidewright.url, role);
+  return page;
+}
+
+async function leave(page: Page): Promise<void> {
+  await page.context().close();
+  expect(complaints, 'the page complained').toEqual([]);
+}
+
+walk('one run of coasters, from the enquiry to the locked sales sheet', async () => {
+  const { quoteAddress, number } = await ownerQuotes();
+  await customerAgrees(number);
+  const jobAddress = await ownerTakesOn(quoteAddress);
+  await makerWorks(jobAddress);
+  const orderNumber = await ownerShips(jobAddress);
+  const invoiceNumber = await bookkeeperInvoices(orderNumber);
+  await bookkeeperLocks(invoiceNumber);
+});
+
+async function ownerQuotes(): Promise<{ quoteAddress: string; number: string }> {
+  const page = await desk('owner');
+  await expectAccessible(page);
+  await visit(page, `${hidewright.url}/counter/quotes/new`);
+  await page.getByLabel('Customer', { exact: true }).selectOption({ label: 'Brambling Brewery' });
+  await page.getByLabel('Pattern', { exact: true }).selectOption({ label: 'Drinks coaster, round' });
+  await page.getByLabel(/What the customer calls it/).fill('Spring ale coasters');
+  await page.getByLabel(/^In hands/).fill(daysFromNow(42));
+  await page.getByLabel('Pieces').first().fill(String(quantity));
+  await page.getByText('worked out:').first().waitFor();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Save the draft' }).click();
+  await page.waitForURL(/\/counter\/quotes\/\d+$/);
+  await settled(page);
+  await expectAccessible(page);
+  const quoteAddress = page.url();
+  const number = /Q-\d+/.exec(await page.getByRole('main').innerText())?.[0] ?? '';
+  await page.getByRole('button', { name: 'Send quote' }).click();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Send by mail' }).click();
+  await page.getByRole('button', { name: 'Send again' }).waitFor();
+  await leave(page);
+  return { quoteAddress, number };
+}
+
+async function customerAgrees(number: string): Promise<void> {
+  const mail = await mailThat(hidewright.mailboxUrl, ({ subject }) => subject.includes(number));
+  expect(mail.to).toContain('taproom@brambling.example.com');
+  const link = mail.links.find((each) => each.includes('/c/'));
+  const context = await (await browser()).newContext({ viewport: phone });
+  const page = await context.newPage();
+  complaints = watch(page);
+  await page.goto(link ?? '');
+  await settled(page);
+  await expectAccessible(page);
+  await page.getByRole('radio', { name: new RegExp(`^${quantity}`) }).check();
+  await page.getByRole('button', { name: new RegExp(`^Agree to ${quantity}`) }).click();
+  await page.getByRole('heading', { name: `You agreed to ${quantity}` }).waitFor();
+  await expectAccessible(page);
+  await leave(page);
+}
+
+async function ownerTakesOn(quoteAddress: string): Promise<string> {
+  const page = await desk('owner');
+  await visit(page, quoteAddress);
+  await page.getByRole('heading', { name: 'Can we make it?' }).waitFor();
+  await page.getByText(/^Yes, by/).waitFor();
+  await page.getByRole('button', { name: /^Take it on/ }).click();
+  await page.waitForURL(/\/counter\/orders\/\d+$/);
+  await settled(page);
+  await expectAccessible(page);
+  await page.getByRole('link', { name: /^J-\d+/ }).first().click();
+  await page.waitForURL(/\/bench\/jobs\/\d+$/);
+  const jobAddress = page.url();
+  expect(idIn(jobAddress)).toBeGreaterThan(0);
+  await leave(page);
+  return jobAddress;
+}
+
+async function makerWorks(jobAddress: string): Promise<void> {
+  const page = await desk('maker', phone);
+  await expectAccessible(page);
+  await visit(page, `${hidewright.url}/bench`);
+  await visit(page, jobAddress);
+  for (let held = page.getByRole('button', { name: /^Take [\d.,]+/ }); (await held.count()) > 0; ) {
+    const before = await held.count();
+    await held.first().click();
+    await expect.poll(() => held.count()).toBeLessThan(before);
+  }
+  await workEveryStep(page);
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Finish and pack' }).click();
+  await page.getByText('finished').first().waitFor();
+  await settled(page);
+  await expectAccessible(page);
+  expect(await page.getByRole('main').innerText()).not.toMatch(/margin|per bench hour|price/i);
+  await leave(page);
+}
+
+/** One reject on the first step that counts pieces; everything else goes through. */
+async function workEveryStep(page: Page): Promise<void> {
+  const steps = page.getByRole('list', { name: 'Steps' }).getByRole('listitem');
+  const names = await steps.getByRole('heading').getByRole('button').allInnerTexts();
+  for (const [at] of names.entries()) {
+    const head = steps.nth(at).getByRole('heading').getByRole('button');
+    if ((await head.getAttribute('aria-expanded')) !== 'true') await head.click();
+    const all = steps.nth(at).getByRole('button', { name: /^\+ (all|row)/ });
+    if (at === 1) await steps.nth(at).getByRole('button', { name: 'Reject', exact: true }).click();
+    if ((await all.count()) > 0) await all.last().click();
+    else await steps.nth(at).getByRole('button', { name: 'One good piece more' }).click();
+    await steps.nth(at).getByRole('button', { name: /\+ ?5/ }).first().click();
+    await steps.nth(at).getByRole('button', { name: /^Log / }).click();
+    await expect.poll(() => steps.nth(at).getByRole('button', { name: /^Log / }).count()).toBe(0);
+  }
+}
+
+async function ownerShips(jobAddress: string): Promise<string> {
+  const page = await desk('owner');
+  await visit(page, jobAddress);
+  await page.getByRole('heading', { name: 'Estimate and fact' }).waitFor();
+  await page.getByRole('link', { name: /^O-\d+/ }).first().click();
+  await page.waitForURL(/\/counter\/orders\/\d+$/);
+  await settled(page);
+  await page.getByRole('button', { name: 'It has left the shop' }).click();
+  await page.getByText('shipped').first().waitFor();
+  await expectAccessible(page);
+  const number = /O-\d+/.exec(await page.getByRole('main').innerText())?.[0] ?? '';
+  await leave(page);
+  return number;
+}
+
+async function bookkeeperInvoices(orderNumber: string): Promise<string> {
+  const page = await desk('bookkeeper');
+  await expectAccessible(page);
+  await visit(page, `${hidewright.url}/books/invoices`);
+  await page
+    .getByRole('region', { name: 'To be invoiced' })
+    .getByRole('article')
+    .filter({ hasText: orderNumber })
+    .getByRole('link')
+    .last()
+    .click();
+  await settled(page);
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Draft the invoice' }).click();
+  await page.waitForURL(/\/books\/invoices\/\d+$/);
+  await page.getByRole('button', { name: /^Issue/ }).click();
+  await page.getByRole('dialog').getByRole('button', { name: 'Issue the invoice' }).click();
+  await page.getByText(/^I-\d+$/).first().waitFor();
+  await settled(page);
+  await expectAccessible(page);
+  const number = /I-\d+/.exec(await page.getByRole('main').innerText())?.[0] ?? '';
+  await page.getByRole('button', { name: /[Pp]ayment/ }).click();
+  await expectAccessible(page);
+  await page.getByRole('dialog').getByRole('button', { name: 'Record the payment' }).click();
+  await page.getByText('paid', { exact: true }).first().waitFor();
+  await leave(page);
+  return number;
+}
+
+async function bookkeeperLocks(invoiceNumber: string): Promise<void> {
+  const page = await desk('bookkeeper');
+  const today = daysFromNow(0);
+  await visit(page, `${hidewright.url}/books/sales-sheets?from=${today.slice(0, 8)}01&to=${today}`);
+  await page.getByText(invoiceNumber).first().waitFor();
+  const download = page.waitForEvent('download');
+  await page.getByRole('link', { name: /spreadsheet|\.xlsx|Download/i }).first().click();
+  expect((await download).suggestedFilename()).toMatch(/\.xlsx$/);
+  await page.getByRole('button', { name: 'Lock these days' }).click();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Lock them' }).click();
+  await page.getByText('Locked.').first().waitFor();
+  await expectAccessible(page);
+  await leave(page);
+}
+
+/** A working day so many days from now, as a day field takes it. */
+function daysFromNow(days: number): string {
+  const day = new Date(Date.now() + days * 86_400_000);
+  if (days > 0) while (day.getUTCDay() % 6 === 0) day.setUTCDate(day.getUTCDate() + 1);
+  return day.toISOString().slice(0, 10);
+}
