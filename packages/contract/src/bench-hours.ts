@@ -7,7 +7,9 @@ const benchDay = z
   .object({
     day,
     minutes: z.string(),
-    planned: z.array(z.object({ jobId: id, number: paperNumber, title: z.string(), minutes: z.string() })),
+    planned: z.array(
+      z.object({ jobId: id, number: paperNumber, title: z.string(), minutes: z.string() }),
+    ),
     /** Logged already on that day. */
     loggedMinutes: z.string(),
     freeMinutes: z.string(),
@@ -21,7 +23,15 @@ export const benchHours = z
   .object({
     days: z.array(benchDay),
     /** Jobs that cannot be done by their promised day at the shop's hours. */
-    late: z.array(z.object({ jobId: id, number: paperNumber, title: z.string(), promisedOn: day, minutesShort: z.string() })),
+    late: z.array(
+      z.object({
+        jobId: id,
+        number: paperNumber,
+        title: z.string(),
+        promisedOn: day,
+        minutesShort: z.string(),
+      }),
+    ),
   })
   .meta({ id: 'BenchHours' });
 export type BenchHours = z.infer<typeof benchHours>;

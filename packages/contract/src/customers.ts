@@ -1,7 +1,18 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { email, id, idParams, instant, line, optionalLine, page, pageQuery, paragraph, version } from './fields.ts';
+import {
+  email,
+  id,
+  idParams,
+  instant,
+  line,
+  optionalLine,
+  page,
+  pageQuery,
+  paragraph,
+  version,
+} from './fields.ts';
 
 const emailOrEmpty = z
   .string()

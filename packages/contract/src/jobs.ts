@@ -1,15 +1,21 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { areaMm2, count, day, id, idParams, instant, optionalLine, page, pageQuery, paperNumber, positiveCount, version } from './fields.ts';
-import { layout } from './layouts.ts';
-import { awaited, orderState } from './orders.ts';
-
-export const jobStates = ['waiting', 'ready', 'at the bench', 'paused', 'finished'] as const;
-export const jobState = z.enum(jobStates);
-export type JobState = z.infer<typeof jobState>;
-
-export const stepPer = z.enum(['piece', 'strike', 'panel', 'strip', 'run']);
+import {
+  areaMm2,
+  count,
+  day,
+  id,
+  idParams,
+  optionalLine,
+  page,
+  pageQuery,
+  paperNumber,
+  positiveCount,
+  version,
+} from './fields.ts';
+import { job, jobState } from './job-ticket.ts';
+import { awaited } from './orders.ts';
 
 /** A job in a list. */
 export const jobCard = z
@@ -37,114 +43,6 @@ export const jobCard = z
   .meta({ id: 'JobCard' });
 export type JobCard = z.infer<typeof jobCard>;
 
-const jobStep = z
-  .object({
-    id,
-    position: count,
-    name: z.string(),
-    per: stepPer,
-    plannedMinutes: z.string(),
-    /** How many of what it is counted per can pass here, after the rejects of the steps before. */
-    limit: count,
-    good: count,
-    rejects: count,
-    seconds: count,
-    minutes: z.string(),
-    /** Nothing is left to log but a correction. */
-    done: z.boolean(),
-    /** A short caution for this kind of work. */
-    caution: z.object({ level: z.enum(['WARNING', 'CAUTION', 'NOTICE']), text: z.string() }).nullable(),
-  })
-  .meta({ id: 'JobStep' });
-export type JobStep = z.infer<typeof jobStep>;
-
-const jobTool = z
-  .object({ id, number: z.string(), kind: z.enum(['cutting die', 'stamp plate']), name: z.string(), slot: z.string(), lifeLeft: z.int() })
-  .meta({ id: 'JobTool' });
-export type JobTool = z.infer<typeof jobTool>;
-
-const jobLot = z
-  .object({
-    lotId: id,
-    tag: z.string(),
-    form: z.string(),
-    shade: z.string(),
-    place: z.string(),
-    /** Still held for this job. */
-    heldAreaMm2: z.string(),
-    /** On hand and held by nobody. */
-    freeAreaMm2: z.string(),
-    /** Taken for this job, less what came back. */
-    takenAreaMm2: z.string(),
-  })
-  .meta({ id: 'JobLot' });
-export type JobLot = z.infer<typeof jobLot>;
-
-const jobHardware = z
-  .object({ hardwareId: id, name: z.string(), needed: count, held: count, free: z.int(), taken: z.int() })
-  .meta({ id: 'JobHardware' });
-export type JobHardware = z.infer<typeof jobHardware>;
-
-const benchLog = z
-  .object({
-    id,
-    stepId: id,
-    stepName: z.string(),
-    good: z.int(),
-    rejects: z.int(),
-    seconds: z.int(),
-    minutes: z.string(),
-    note: z.string(),
-    at: instant,
-    personName: z.string(),
-  })
-  .meta({ id: 'BenchLog' });
-export type BenchLog = z.infer<typeof benchLog>;
-
-/** The ticket: all that the maker needs, and nothing that the maker must not see. */
-export const job = z
-  .object({
-    id,
-    number: paperNumber,
-    state: jobState,
-    orderId: id,
-    orderNumber: paperNumber,
-    orderState,
-    awaits: z.array(awaited),
-    title: z.string(),
-    customerName: z.string(),
-    patternId: id,
-    patternName: z.string(),
-    patternVersion: count,
-    leatherName: z.string(),
-    quantity: count,
-    cutCount: count,
-    containers: count,
-    layout,
-    /** SVG path data in mm; null for a hand count. */
-    outlinePath: z.string().nullable(),
-    neededAreaMm2: z.string(),
-    promisedOn: day,
-    inHandsOn: day.nullable(),
-    plannedMinutes: z.string(),
-    loggedMinutes: z.string(),
-    needsPlate: z.boolean(),
-    needsDie: z.boolean(),
-    plate: jobTool.nullable(),
-    die: jobTool.nullable(),
-    lots: z.array(jobLot),
-    hardware: z.array(jobHardware),
-    steps: z.array(jobStep),
-    logs: z.array(benchLog),
-    good: count,
-    seconds: count,
-    startedAt: instant.nullable(),
-    finishedAt: instant.nullable(),
-    version,
-  })
-  .meta({ id: 'Job' });
-export type Job = z.infer<typeof job>;
-
 /** Estimate and fact of one thing, as exact decimals in its unit. */
 const compared = z.object({
   what: z.string(),
@@ -166,7 +64,10 @@ export type JobComparison = z.infer<typeof jobComparison>;
 
 const bench = ['owner', 'maker'] as const;
 const someArea = areaMm2.refine((text) => Number(text) > 0, 'Enter an area above 0.');
-const signedCount = z.int('Enter a whole number.').min(-100_000, 'That is too many.').max(100_000, 'That is too many.');
+const signedCount = z
+  .int('Enter a whole number.')
+  .min(-100_000, 'That is too many.')
+  .max(100_000, 'That is too many.');
 const signedMinutes = z
   .string('Enter minutes, such as 12 or 7.5.')
   .trim()
@@ -179,7 +80,10 @@ export const listJobs = endpoint({
   path: '/jobs',
   summary: 'Jobs, newest first',
   access: bench,
-  query: pageQuery.extend({ state: jobState.optional(), open: z.enum(['true', 'false']).optional() }),
+  query: pageQuery.extend({
+    state: jobState.optional(),
+    open: z.enum(['true', 'false']).optional(),
+  }),
   reply: page(jobCard),
 });
 
@@ -234,8 +138,14 @@ export const finishJob = endpoint({
   body: z.strictObject({
     good: positiveCount,
     seconds: count.default(0),
-    leatherLeft: z.array(z.strictObject({ lotId: id, areaMm2 })).max(50).default([]),
-    hardwareLeft: z.array(z.strictObject({ hardwareId: id, quantity: count })).max(50).default([]),
+    leatherLeft: z
+      .array(z.strictObject({ lotId: id, areaMm2 }))
+      .max(50)
+      .default([]),
+    hardwareLeft: z
+      .array(z.strictObject({ hardwareId: id, quantity: count }))
+      .max(50)
+      .default([]),
   }),
   reply: job,
 });

@@ -19,7 +19,12 @@ export const offer = z
     outline: z.object({ path: z.string(), words: z.string() }).nullable(),
     currency: z.string(),
     breaks: z.array(
-      z.object({ quantity: runQuantity, priceEach: z.string(), goodsTotal: z.string(), total: z.string() }),
+      z.object({
+        quantity: runQuantity,
+        priceEach: z.string(),
+        goodsTotal: z.string(),
+        total: z.string(),
+      }),
     ),
     /** Charged once, in a line of its own. */
     tooling: z.array(z.object({ name: z.string(), charge: z.string() })),

@@ -1,7 +1,18 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { count, day, id, idParams, instant, page, pageQuery, paperNumber, runQuantity, version } from './fields.ts';
+import {
+  count,
+  day,
+  id,
+  idParams,
+  instant,
+  page,
+  pageQuery,
+  paperNumber,
+  runQuantity,
+  version,
+} from './fields.ts';
 
 export const orderStates = [
   'awaiting proof',
@@ -42,7 +53,13 @@ const checkAnswer = z
 export type CheckAnswer = z.infer<typeof checkAnswer>;
 
 /** The area that would come from one lot. */
-const checkLot = z.object({ lotId: id, tag: z.string(), place: z.string(), freeAreaMm2: z.string(), takesAreaMm2: z.string() });
+const checkLot = z.object({
+  lotId: id,
+  tag: z.string(),
+  place: z.string(),
+  freeAreaMm2: z.string(),
+  takesAreaMm2: z.string(),
+});
 
 export const runCheck = z
   .object({
@@ -93,7 +110,9 @@ export const order = z
       seconds: count,
     }),
     /** Its invoice, where one has been drafted or issued. */
-    invoice: confidential(z.object({ id, number: paperNumber.nullable(), state: z.string() }).nullable()),
+    invoice: confidential(
+      z.object({ id, number: paperNumber.nullable(), state: z.string() }).nullable(),
+    ),
     version,
   })
   .meta({ id: 'Order' });
@@ -104,7 +123,8 @@ const everybody = ['owner', 'maker', 'bookkeeper'] as const;
 export const checkQuote = endpoint({
   method: 'GET',
   path: '/quotes/{id}/check',
-  summary: 'Can we make it? Leather, hardware, tooling and bench hours against what is free, by that day',
+  summary:
+    'Can we make it? Leather, hardware, tooling and bench hours against what is free, by that day',
   access: ['owner', 'maker'],
   params: idParams,
   query: z.strictObject({

@@ -8,80 +8,25 @@ import {
   id,
   idParams,
   instant,
-  line,
-  money,
   optionalLine,
   page,
   pageQuery,
   paperNumber,
-  paragraph,
-  percent,
   runQuantity,
-  unitPrice,
   version,
 } from './fields.ts';
 import { layout } from './layouts.ts';
+import { quoteBody } from './quote-body.ts';
 
 export const quoteStates = ['draft', 'sent', 'agreed', 'declined', 'superseded', 'lapsed'] as const;
 export const quoteState = z.enum(quoteStates);
 export type QuoteState = z.infer<typeof quoteState>;
 
 /** How a customer can say yes other than by the link. */
-export const agreedByWord = z.enum(['phone', 'mail', 'counter'], 'Choose how it was agreed: phone, mail or counter.');
-
-const breaks = z
-  .array(
-    z.strictObject({
-      quantity: runQuantity,
-      /** The owner's own price each; null leaves the price that is worked out. */
-      typedPrice: unitPrice.nullable().default(null),
-    }),
-    'Enter at least one quantity.',
-  )
-  .min(1, 'Enter at least one quantity.')
-  .max(8, 'Keep it to 8 quantities.')
-  .superRefine((rungs, context) => {
-    const seen = new Set<number>();
-    rungs.forEach(({ quantity }, at) => {
-      if (seen.has(quantity)) {
-        context.addIssue({ code: 'custom', path: [at, 'quantity'], message: `${quantity} is there already. Enter each quantity once.` });
-      }
-      seen.add(quantity);
-    });
-  });
-
-const tooling = z
-  .array(
-    z.strictObject({
-      name: line(80, 'Say which tool, such as Stamp plate.'),
-      /** What the shop pays for it. */
-      cost: money,
-      /** What the customer pays for it, as a line of its own. */
-      charge: money,
-    }),
-  )
-  .max(8, 'Keep it to 8 tools.');
-
-/** What a person says about a quote; everything else is worked out from the pattern and the shop's values. */
-export const quoteBody = z
-  .strictObject({
-    customerId: z.int('Choose a customer.').positive('Choose a customer.'),
-    patternId: z.int('Choose a pattern.').positive('Choose a pattern.'),
-    /** What the customer calls it; the pattern's name where it is empty. */
-    title: optionalLine(80).default(''),
-    inHandsOn: day.nullable().default(null),
-    breaks,
-    tooling: tooling.default([]),
-    message: paragraph(2000).default(''),
-    overrides: z
-      .strictObject({
-        rejectPercent: percent.optional(),
-        leatherPricePerFt2: unitPrice.optional(),
-      })
-      .default({}),
-  })
-  .meta({ id: 'QuoteBody' });
-export type QuoteBody = z.output<typeof quoteBody>;
+export const agreedByWord = z.enum(
+  ['phone', 'mail', 'counter'],
+  'Choose how it was agreed: phone, mail or counter.',
+);
 
 const letter = z.object({
   state: z.enum(['waiting', 'sent', 'failed']),
@@ -132,8 +77,17 @@ export const quote = z
     /** SVG path data in mm; null where there is no drawing. */
     outlinePath: z.string().nullable(),
     breaks: z.array(rung),
-    tooling: z.array(z.object({ name: z.string(), cost: confidential(z.string()), charge: confidential(z.string()) })),
-    overrides: z.object({ rejectPercent: z.string().optional(), leatherPricePerFt2: confidential(z.string()) }),
+    tooling: z.array(
+      z.object({
+        name: z.string(),
+        cost: confidential(z.string()),
+        charge: confidential(z.string()),
+      }),
+    ),
+    overrides: z.object({
+      rejectPercent: z.string().optional(),
+      leatherPricePerFt2: confidential(z.string()),
+    }),
     message: confidential(z.string()),
     /** The snapshot it is priced from, whole. */
     input: confidential(domainRecord<RunInput>('RunInput')),
@@ -169,7 +123,10 @@ export const listQuotes = endpoint({
   path: '/quotes',
   summary: 'The quotes, newest first',
   access: everybody,
-  query: pageQuery.extend({ state: quoteState.optional(), customerId: z.coerce.number().int().positive().optional() }),
+  query: pageQuery.extend({
+    state: quoteState.optional(),
+    customerId: z.coerce.number().int().positive().optional(),
+  }),
   reply: page(quoteRow),
 });
 

@@ -39,14 +39,20 @@ async function mailQuote() {
 }
 
 const mailOf = (quoteId: number) =>
-  shop.context.orm.em.fork().findOneOrFail(OutgoingMail, { subjectKind: 'quote', subjectId: quoteId });
-const letterOf = async (quoteId: number) => (await shop.as('owner').get(`/api/quotes/${quoteId}`)).body.letter;
+  shop.context.orm.em
+    .fork()
+    .findOneOrFail(OutgoingMail, { subjectKind: 'quote', subjectId: quoteId });
+const letterOf = async (quoteId: number) =>
+  (await shop.as('owner').get(`/api/quotes/${quoteId}`)).body.letter;
 
 describe('the outbox', () => {
   it('really sends a quote, from the shop’s name, with the link and the quote as PDF', async () => {
     const { quote, linkUrl } = await mailQuote();
     expect(linkUrl).toMatch(/^http:\/\/quotes\.example\.com\/c\//);
-    expect(await letterOf(quote.id)).toMatchObject({ state: 'waiting', recipient: 'bar@example.com' });
+    expect(await letterOf(quote.id)).toMatchObject({
+      state: 'waiting',
+      recipient: 'bar@example.com',
+    });
     expect(smtp.mails).toHaveLength(0);
     expect(await sendDueMail(shop.context)).toBe(1);
     const [mail = ''] = smtp.mails;
@@ -56,7 +62,10 @@ describe('the outbox', () => {
     expect(textOf(mail)).toContain(linkUrl);
     expect(mail).toContain(`filename=${quote.number}.pdf`);
     expect(attachmentOf(mail).subarray(0, 5).toString()).toBe('%PDF-');
-    expect(await letterOf(quote.id)).toMatchObject({ state: 'sent', sentAt: '2026-12-01T09:00:00.000Z' });
+    expect(await letterOf(quote.id)).toMatchObject({
+      state: 'sent',
+      sentAt: '2026-12-01T09:00:00.000Z',
+    });
   });
 
   it('sends each mail once, and keeps no link after that', async () => {
@@ -87,7 +96,10 @@ describe('the outbox', () => {
     const { quote } = await mailQuote();
     smtp.refuse = true;
     expect(await sendDueMail(shop.context)).toBe(0);
-    expect(await letterOf(quote.id)).toMatchObject({ state: 'waiting', lastError: expect.stringContaining('451') });
+    expect(await letterOf(quote.id)).toMatchObject({
+      state: 'waiting',
+      lastError: expect.stringContaining('451'),
+    });
     expect((await mailOf(quote.id)).nextTryAt).toBe('2026-12-01T09:00:30.000Z');
     expect(await sendDueMail(shop.context)).toBe(0);
     expect((await mailOf(quote.id)).attempts).toBe(1);
@@ -117,7 +129,10 @@ describe('the outbox', () => {
     await shop.context.orm.em
       .fork()
       .getConnection()
-      .execute('UPDATE quote SET title = ? WHERE id = ?', ['Wraps\r\nBcc: eve@example.com', quote.id]);
+      .execute('UPDATE quote SET title = ? WHERE id = ?', [
+        'Wraps\r\nBcc: eve@example.com',
+        quote.id,
+      ]);
     await shop
       .as('owner')
       .post(`/api/quotes/${quote.id}/sendings`)
@@ -129,7 +144,9 @@ describe('the outbox', () => {
   });
 
   it('needs an address', async () => {
-    const customer = (await shop.as('owner').post('/api/customers').send({ name: 'No mail' }).expect(201)).body;
+    const customer = (
+      await shop.as('owner').post('/api/customers').send({ name: 'No mail' }).expect(201)
+    ).body;
     const quote = await draftQuote({ ...ready, customer });
     const { body } = await shop
       .as('owner')
@@ -147,7 +164,9 @@ function textOf(mail: string): string {
   const [head = '', body = ''] = split(part);
   if (/base64/i.test(head)) return Buffer.from(body, 'base64').toString('utf8');
   const joined = body.replaceAll('=\r\n', '');
-  return joined.replaceAll(/=([0-9A-F]{2})/g, (_, hex: string) => String.fromCharCode(parseInt(hex, 16)));
+  return joined.replaceAll(/=([0-9A-F]{2})/g, (_, hex: string) =>
+    String.fromCharCode(parseInt(hex, 16)),
+  );
 }
 
 function attachmentOf(mail: string): Buffer {

@@ -44,7 +44,11 @@ async function sendOne(context: Context, mail: OutgoingMail): Promise<boolean> {
 async function letterOf(context: Context, mail: OutgoingMail): Promise<Letter> {
   const em = context.orm.em.fork();
   const workshop = await em.findOneOrFail(Workshop, 1);
-  const owner = await em.findOneOrFail(Person, { role: 'owner', active: true }, { orderBy: { id: 'asc' } });
+  const owner = await em.findOneOrFail(
+    Person,
+    { role: 'owner', active: true },
+    { orderBy: { id: 'asc' } },
+  );
   const attachments = mail.attachments.map(async ({ name, type, hash }) => ({
     filename: name,
     contentType: type,

@@ -7,7 +7,12 @@ export interface Repeating {
 }
 
 /** Does a task again and again, with a pause between; what is to be done lies in the database, the timer only wakes it. */
-export function repeat(name: string, pauseMs: number, log: Logger, task: () => Promise<void>): Repeating {
+export function repeat(
+  name: string,
+  pauseMs: number,
+  log: Logger,
+  task: () => Promise<void>,
+): Repeating {
   let stopped = false;
   let timer: NodeJS.Timeout | undefined;
   let round = Promise.resolve();

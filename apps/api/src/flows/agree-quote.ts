@@ -30,7 +30,10 @@ export async function agreeQuote(work: Work, asked: Agreement): Promise<Quote> {
   quote.agreedHow = asked.how;
   await work.em.flush();
   await logDeed(work, {
-    action: asked.how === 'link' ? `agreed to quote ${quote.number}` : `noted that quote ${quote.number} was agreed`,
+    action:
+      asked.how === 'link'
+        ? `agreed to quote ${quote.number}`
+        : `noted that quote ${quote.number} was agreed`,
     subjectKind: 'quote',
     subjectId: quote.id,
     detail: { quantity: asked.quantity, how: asked.how },
@@ -49,8 +52,14 @@ function requireStillGood(work: Work, quote: Quote): void {
 }
 
 async function requireOffered(work: Work, quote: Quote, quantity: number): Promise<void> {
-  const rungs = await work.em.find(QuoteBreak, { quoteId: quote.id }, { orderBy: { quantity: 'asc' } });
+  const rungs = await work.em.find(
+    QuoteBreak,
+    { quoteId: quote.id },
+    { orderBy: { quantity: 'asc' } },
+  );
   if (rungs.some((rung) => rung.quantity === quantity)) return;
   const offered = rungs.map((rung) => rung.quantity).join(', ');
-  throw invalid([{ field: 'quantity', message: `Choose one of the quantities offered: ${offered}.` }]);
+  throw invalid([
+    { field: 'quantity', message: `Choose one of the quantities offered: ${offered}.` },
+  ]);
 }

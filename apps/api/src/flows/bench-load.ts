@@ -28,13 +28,20 @@ export async function openJobs(em: EntityManager): Promise<OpenJob[]> {
     FROM job j JOIN customer_order o ON o.id = j.order_id
     WHERE j.state <> 'finished' AND o.state <> 'cancelled' ORDER BY j.id`,
   );
-  const steps = await em.find(JobStep, { jobId: { $in: rows.map(({ id }) => id) } }, { orderBy: { position: 'asc' } });
+  const steps = await em.find(
+    JobStep,
+    { jobId: { $in: rows.map(({ id }) => id) } },
+    { orderBy: { position: 'asc' } },
+  );
   return rows.map((row) => ({
     jobId: row.id,
     number: row.number,
     title: row.title,
     promisedOn: row.promised_on,
-    remaining: remainingOf(row, steps.filter(({ jobId }) => jobId === row.id)),
+    remaining: remainingOf(
+      row,
+      steps.filter(({ jobId }) => jobId === row.id),
+    ),
   }));
 }
 

@@ -11,7 +11,12 @@ import { keepRungs, workOutQuote } from './work-out-quote.ts';
  * Works a draft out again from what is typed now, with today's prices and the pattern's latest version.
  * @throws {Problem} 409 when it is no draft; 422 as when it was created
  */
-export async function changeQuote(work: Work, quote: Quote, asked: QuoteBody, laid: LaidPattern): Promise<Quote> {
+export async function changeQuote(
+  work: Work,
+  quote: Quote,
+  asked: QuoteBody,
+  laid: LaidPattern,
+): Promise<Quote> {
   requirePossible(quote, 'change');
   const workedOut = await workOutQuote(work, asked, laid);
   await work.em.nativeDelete(QuoteBreak, { quoteId: quote.id });

@@ -34,22 +34,33 @@ export async function checkQuotedRun(work: Work, asked: Asked): Promise<RunCheck
   const by = asked.by ?? usualDay(work, quote);
   requireReachable(work, by, 'by');
   const quantity = asked.quantity ?? (await usualQuantity(work.em, quote));
-  return checkPlan(work, await planRun(work.em, quote, quantity), { by, customerId: quote.customerId });
+  return checkPlan(work, await planRun(work.em, quote, quantity), {
+    by,
+    customerId: quote.customerId,
+  });
 }
 
 /** A day that can be promised: not over, and within two years. @throws {Problem} 422 */
 export function requireReachable({ today }: Work, day: string, field: string): void {
-  if (day < today) throw invalid([{ field, message: 'That day is over. Choose today or a day to come.' }]);
-  if (day > addDays(today, 731)) throw invalid([{ field, message: 'That is more than two years off. Choose a nearer day.' }]);
+  if (day < today)
+    throw invalid([{ field, message: 'That day is over. Choose today or a day to come.' }]);
+  if (day > addDays(today, 731))
+    throw invalid([{ field, message: 'That is more than two years off. Choose a nearer day.' }]);
 }
 
 function usualDay({ today }: Work, quote: Quote): string {
-  return quote.inHandsOn !== null && quote.inHandsOn >= today ? quote.inHandsOn : addWorkdays(today, 10);
+  return quote.inHandsOn !== null && quote.inHandsOn >= today
+    ? quote.inHandsOn
+    : addWorkdays(today, 10);
 }
 
 async function usualQuantity(em: EntityManager, quote: Quote): Promise<number> {
   if (quote.agreedQuantity !== null) return quote.agreedQuantity;
-  const least = await em.findOneOrFail(QuoteBreak, { quoteId: quote.id }, { orderBy: { quantity: 'asc' } });
+  const least = await em.findOneOrFail(
+    QuoteBreak,
+    { quoteId: quote.id },
+    { orderBy: { quantity: 'asc' } },
+  );
   return least.quantity;
 }
 
@@ -72,10 +83,21 @@ export async function checkPlan(
     hours: { day: sayDay(by), neededMinutes: hours.neededMinutes, freeMinutes: hours.freeMinutes },
   };
   const { ok, answers } = checkRun(input);
-  const remedies = ['Buy more, or receive it if it is here.', ...hardware.map(buyMore), ...tooling.map(({ remedy }) => remedy), hours.remedy];
+  const remedies = [
+    'Buy more, or receive it if it is here.',
+    ...hardware.map(buyMore),
+    ...tooling.map(({ remedy }) => remedy),
+    hours.remedy,
+  ];
   const sayLeather = await leatherSayer(em);
   return {
-    ...{ quantity: plan.quantity, by, cutCount: plan.cutCount, containers: plan.containers, yes: ok },
+    ...{
+      quantity: plan.quantity,
+      by,
+      cutCount: plan.cutCount,
+      containers: plan.containers,
+      yes: ok,
+    },
     answers: answers.map((answer, at) => toReply(answer, sayLeather(answer), remedies[at] ?? '')),
     lots: answers.flatMap((answer) => takesFrom(answer, lots)),
     earliestDay: hours.earliest,
@@ -95,12 +117,23 @@ async function leatherSayer(em: EntityManager): Promise<(answer: Answer) => stri
 
 function toReply(answer: Answer, said: string, remedy: string): CheckAnswer {
   const { about, name, unit, needed, free, short, ok } = answer;
-  return { about, name, unit, needed, free, short, enough: ok, sentence: ok ? said : `${said} ${remedy}`.trim() };
+  return {
+    about,
+    name,
+    unit,
+    needed,
+    free,
+    short,
+    enough: ok,
+    sentence: ok ? said : `${said} ${remedy}`.trim(),
+  };
 }
 
 function takesFrom(answer: Answer, rack: readonly RackLot[]): RunCheck['lots'] {
   return (answer.lots ?? []).flatMap(({ lotId, tag, takeAreaMm2 }) => {
     const lot = rack.find((each) => each.lotId === lotId);
-    return lot === undefined ? [] : [{ lotId, tag, place: lot.place, freeAreaMm2: lot.freeAreaMm2, takesAreaMm2: takeAreaMm2 }];
+    return lot === undefined
+      ? []
+      : [{ lotId, tag, place: lot.place, freeAreaMm2: lot.freeAreaMm2, takesAreaMm2: takeAreaMm2 }];
   });
 }

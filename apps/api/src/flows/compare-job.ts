@@ -1,5 +1,12 @@
 import type { Compared, JobComparison } from '@hidewright/contract';
-import { compareRun, goodShare, toAtMost, type BreakNumbers, type CompareName, type RunFact } from '@hidewright/domain';
+import {
+  compareRun,
+  goodShare,
+  toAtMost,
+  type BreakNumbers,
+  type CompareName,
+  type RunFact,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
@@ -17,7 +24,10 @@ export async function compareFinished({ em }: Work, jobId: number): Promise<JobC
   const steps = await stepsOf(em, jobId);
   const used = await usedBy(em, job, steps);
   const numbers = numbersOf(estimateOf(job));
-  return { work: compareWork(job, steps, used, numbers), money: compareMoney(estimateOf(job).input, numbers, used) };
+  return {
+    work: compareWork(job, steps, used, numbers),
+    money: compareMoney(estimateOf(job).input, numbers, used),
+  };
 }
 
 const words: Record<CompareName, string> = {
@@ -48,7 +58,10 @@ function compareWork(job: Job, steps: JobStep[], used: Used, numbers: BreakNumbe
   return [
     ...rows,
     { what: 'Seconds', unit: 'pieces', estimate: '0', fact: String(job.seconds) },
-    ...hardwareRow(hardware.reduce((sum, { quantity }) => sum + quantity, 0), used),
+    ...hardwareRow(
+      hardware.reduce((sum, { quantity }) => sum + quantity, 0),
+      used,
+    ),
   ];
 }
 

@@ -11,14 +11,20 @@ import type { Used } from './used-by-job.ts';
  */
 export function compareMoney(input: RunInput, numbers: BreakNumbers, used: Used): Compared[] {
   const said = (kind: CostKind): Decimal =>
-    numbers.costLines.filter((line) => line.kind === kind).reduce((sum, { amount }) => sum.plus(amount), new Decimal(0));
+    numbers.costLines
+      .filter((line) => line.kind === kind)
+      .reduce((sum, { amount }) => sum.plus(amount), new Decimal(0));
   const leather = used.leatherCost ?? (said('leather').isZero() ? new Decimal(0) : null);
   const hardware = used.hardwareCost ?? (said('hardware').isZero() ? new Decimal(0) : null);
   const wages = used.minutes?.times(input.wagePerHour).dividedBy(60) ?? null;
   const left =
     leather === null || hardware === null
       ? null
-      : new Decimal(numbers.total).minus(leather).minus(hardware).minus(said('tooling')).minus(said('packing'));
+      : new Decimal(numbers.total)
+          .minus(leather)
+          .minus(hardware)
+          .minus(said('tooling'))
+          .minus(said('packing'));
   return [
     row('Leather', said('leather'), leather),
     row('Hardware', said('hardware'), hardware),
@@ -40,7 +46,11 @@ function perBenchHour(left: Decimal | null, minutes: Decimal | null): Decimal | 
   return left === null || minutes === null ? null : left.times(60).dividedBy(minutes);
 }
 
-function perHourAllIn(input: RunInput, left: Decimal | null, minutes: Decimal | null): Decimal | null {
+function perHourAllIn(
+  input: RunInput,
+  left: Decimal | null,
+  minutes: Decimal | null,
+): Decimal | null {
   if (left === null || minutes === null) return null;
   const all = minutes.plus(input.deskMinutesPerOrder);
   const wages = all.times(input.wagePerHour).dividedBy(60);

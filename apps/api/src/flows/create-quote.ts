@@ -21,6 +21,10 @@ export async function createQuote(work: Work, asked: QuoteBody, laid: LaidPatter
   });
   await work.em.flush();
   await keepRungs(work, quote.id, workedOut);
-  await logDeed(work, { action: `drafted quote ${quote.number}`, subjectKind: 'quote', subjectId: quote.id });
+  await logDeed(work, {
+    action: `drafted quote ${quote.number}`,
+    subjectKind: 'quote',
+    subjectId: quote.id,
+  });
   return quote;
 }

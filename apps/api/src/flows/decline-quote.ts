@@ -8,7 +8,10 @@ import type { Work } from '../work.ts';
  * Notes that the customer declined: the link then says so.
  * @throws {Problem} 409 when the quote is neither a draft nor sent
  */
-export async function declineQuote(work: Work, asked: { quoteId: number; reason: string }): Promise<Quote> {
+export async function declineQuote(
+  work: Work,
+  asked: { quoteId: number; reason: string },
+): Promise<Quote> {
   const quote = await work.em.findOne(Quote, asked.quoteId);
   if (quote === null) throw notFound('quote');
   requirePossible(quote, 'decline');

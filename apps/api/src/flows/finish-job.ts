@@ -45,12 +45,24 @@ export async function finishJob(work: Work, jobId: number, finished: Finished): 
 function refuseMoreThanThereIs(job: Job, { good, seconds }: Finished, most: number): void {
   if (good + seconds <= most) return;
   const spoiled = job.cutCount - most;
-  const why = spoiled > 0 ? `${job.cutCount} are cut and ${spoiled} are logged as rejects` : `${job.cutCount} are cut`;
+  const why =
+    spoiled > 0
+      ? `${job.cutCount} are cut and ${spoiled} are logged as rejects`
+      : `${job.cutCount} are cut`;
   const field = good > most ? 'good' : 'seconds';
-  throw invalid([{ field, message: `${why}, so at most ${most} pieces can come out. Count again, or correct the rejects.` }]);
+  throw invalid([
+    {
+      field,
+      message: `${why}, so at most ${most} pieces can come out. Count again, or correct the rejects.`,
+    },
+  ]);
 }
 
-async function bringBack(work: Work, { id: jobId, number }: Job, { leatherLeft, hardwareLeft }: Finished): Promise<void> {
+async function bringBack(
+  work: Work,
+  { id: jobId, number }: Job,
+  { leatherLeft, hardwareLeft }: Finished,
+): Promise<void> {
   const reason = `left over from ${number}`;
   for (const { lotId, areaMm2 } of leatherLeft) {
     const quantity = scaled(new Decimal(areaMm2), 3);
@@ -69,11 +81,17 @@ async function countStrikes(work: Work, job: Job, order: Order, uses: number): P
   for (const kind of kinds) {
     if (kind === null) continue;
     const tool = chooseTool(await toolsFor(work.em, kind, forWhom), uses);
-    if (tool !== undefined) await addImpressions(work, { toolId: tool.id, uses, jobId: job.id, reason: job.number });
+    if (tool !== undefined)
+      await addImpressions(work, { toolId: tool.id, uses, jobId: job.id, reason: job.number });
   }
 }
 
-async function close(work: Work, job: Job, order: Order, { good, seconds }: Finished): Promise<void> {
+async function close(
+  work: Work,
+  job: Job,
+  order: Order,
+  { good, seconds }: Finished,
+): Promise<void> {
   job.state = 'finished';
   job.good = good;
   job.seconds = seconds;
@@ -81,6 +99,15 @@ async function close(work: Work, job: Job, order: Order, { good, seconds }: Fini
   order.state = 'packed';
   await work.em.flush();
   const detail = { good, seconds };
-  await logDeed(work, { action: `finished ${job.number}`, subjectKind: 'job', subjectId: job.id, detail });
-  await logDeed(work, { action: `packed ${order.number}`, subjectKind: 'order', subjectId: order.id });
+  await logDeed(work, {
+    action: `finished ${job.number}`,
+    subjectKind: 'job',
+    subjectId: job.id,
+    detail,
+  });
+  await logDeed(work, {
+    action: `packed ${order.number}`,
+    subjectKind: 'order',
+    subjectId: order.id,
+  });
 }

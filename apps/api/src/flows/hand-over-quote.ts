@@ -29,12 +29,21 @@ export interface HandedOver {
  * Makes a link for the customer and puts it into a mail, or hands it back to be copied.
  * @throws {Problem} 422 when it should go by mail and cannot
  */
-export async function handOverQuote(work: Work, quote: Quote, way: Way, drawn: QuoteOnPaper): Promise<HandedOver> {
+export async function handOverQuote(
+  work: Work,
+  quote: Quote,
+  way: Way,
+  drawn: QuoteOnPaper,
+): Promise<HandedOver> {
   const customer = await work.em.findOneOrFail(Customer, quote.customerId);
   if (way.by === 'mail') requireMailable(customer, way);
   const token = await issueLink(work, quote.id, drawn.paper.validUntil);
   const linkUrl = `${way.origin}/c/${token}`;
-  const { subject, text } = quoteLetter(drawn.paper, linkUrl, customer.contactName || customer.name);
+  const { subject, text } = quoteLetter(
+    drawn.paper,
+    linkUrl,
+    customer.contactName || customer.name,
+  );
   await noteFile(work, drawn.file);
   if (way.by === 'mail') {
     const { name, hash, type } = drawn.file;

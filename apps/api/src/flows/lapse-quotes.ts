@@ -8,7 +8,11 @@ export async function lapseQuotes(work: Work): Promise<number> {
   for (const quote of over) {
     quote.state = 'lapsed';
     await work.em.flush();
-    await logDeed(work, { action: `let quote ${quote.number} lapse`, subjectKind: 'quote', subjectId: quote.id });
+    await logDeed(work, {
+      action: `let quote ${quote.number} lapse`,
+      subjectKind: 'quote',
+      subjectId: quote.id,
+    });
   }
   return over.length;
 }

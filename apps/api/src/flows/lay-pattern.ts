@@ -29,7 +29,10 @@ export async function layPattern(
   const em = context.orm.em.fork();
   const pattern = await em.findOne(Pattern, patternId);
   if (pattern === null) throw missing;
-  const version = await em.findOneOrFail(PatternVersion, { patternId, number: pattern.latestVersion });
+  const version = await em.findOneOrFail(PatternVersion, {
+    patternId,
+    number: pattern.latestVersion,
+  });
   const definition = version.definition as PatternDefinition;
   const worked = await layoutFor(context, definition);
   requirePieces(worked.layout);

@@ -28,7 +28,10 @@ export async function logBench(work: Work, jobId: number, entry: BenchEntry): Pr
   requireJobState(job, 'ready', 'at the bench');
   const steps = await stepsOf(work.em, jobId);
   const step = steps.find(({ id }) => id === entry.stepId);
-  if (step === undefined) throw invalid([{ field: 'stepId', message: 'This job has no such step. Open its ticket again.' }]);
+  if (step === undefined)
+    throw invalid([
+      { field: 'stepId', message: 'This job has no such step. Open its ticket again.' },
+    ]);
   const minutes = new Decimal(entry.minutes);
   if (entry.good === 0 && entry.rejects === 0 && entry.seconds === 0 && minutes.isZero()) {
     throw invalid([{ field: 'good', message: 'Count some pieces or minutes first.' }]);
@@ -58,7 +61,12 @@ function refuseAny(faults: FieldFault[]): void {
 type Counted = 'good' | 'rejects' | 'seconds';
 
 function tooManyLogged(job: Job, steps: JobStep[], step: JobStep, entry: BenchEntry): FieldFault[] {
-  const after = { per: step.per, good: step.good + entry.good, rejects: step.rejects + entry.rejects, seconds: step.seconds + entry.seconds };
+  const after = {
+    per: step.per,
+    good: step.good + entry.good,
+    rejects: step.rejects + entry.rejects,
+    seconds: step.seconds + entry.seconds,
+  };
   const below = (['good', 'rejects', 'seconds'] as const).filter((field) => after[field] < 0);
   if (below.length > 0) return below.map((field) => ({ field, message: takeBack(step, field) }));
   if (step.minutes.plus(entry.minutes).isNegative()) {
@@ -69,9 +77,14 @@ function tooManyLogged(job: Job, steps: JobStep[], step: JobStep, entry: BenchEn
   const limits = stepLimits(job, changed);
   const at = steps.indexOf(step);
   const limit = limits[at] ?? 0;
-  if (handledIn(after) > limit) return [{ field: busiest(entry), message: beyond(step, entry, limit) }];
-  const starved = changed.findIndex((each, later) => later > at && handledIn(each) > (limits[later] ?? 0));
-  return starved < 0 ? [] : [{ field: 'rejects', message: starves(steps[starved] as JobStep, limits[starved] ?? 0) }];
+  if (handledIn(after) > limit)
+    return [{ field: busiest(entry), message: beyond(step, entry, limit) }];
+  const starved = changed.findIndex(
+    (each, later) => later > at && handledIn(each) > (limits[later] ?? 0),
+  );
+  return starved < 0
+    ? []
+    : [{ field: 'rejects', message: starves(steps[starved] as JobStep, limits[starved] ?? 0) }];
 }
 
 const words: Record<Counted, string> = { good: 'good', rejects: 'rejects', seconds: 'seconds' };
@@ -93,7 +106,8 @@ const units: Record<JobStep['per'], [string, string]> = {
   run: ['run', 'runs'],
 };
 
-const countOf = (count: number, per: JobStep['per']): string => `${count} ${units[per][count === 1 ? 0 : 1]}`;
+const countOf = (count: number, per: JobStep['per']): string =>
+  `${count} ${units[per][count === 1 ? 0 : 1]}`;
 
 function beyond(step: JobStep, entry: BenchEntry, limit: number): string {
   const logged = handledIn(step);

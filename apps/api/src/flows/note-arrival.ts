@@ -4,7 +4,12 @@ import { logDeed } from '../modules/activity/activity-log.ts';
 import { Job } from '../modules/jobs/job.entity.ts';
 import { findOrder } from '../modules/orders/find-order.ts';
 import type { Order } from '../modules/orders/order.entity.ts';
-import { allowedFor, arrivalWords, isAwaiting, stateAwaiting } from '../modules/orders/order-states.ts';
+import {
+  allowedFor,
+  arrivalWords,
+  isAwaiting,
+  stateAwaiting,
+} from '../modules/orders/order-states.ts';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 import type { Tool } from '../modules/tools/tool.entity.ts';
 import type { Work } from '../work.ts';
@@ -22,7 +27,12 @@ export async function noteArrival(work: Work, orderId: number, what: Awaited): P
   order.state = stateAwaiting(order.awaits);
   await work.em.flush();
   const action = `noted for ${order.number}: ${arrivalWords(what)}`;
-  await logDeed(work, { action, subjectKind: 'order', subjectId: order.id, detail: { state: order.state } });
+  await logDeed(work, {
+    action,
+    subjectKind: 'order',
+    subjectId: order.id,
+    detail: { state: order.state },
+  });
   if (what === 'tooling') await rackWhatWasOrdered(work, order);
   if (order.awaits.length === 0) await makeReady(work, order);
   return order;
@@ -41,14 +51,22 @@ async function rackWhatWasOrdered(work: Work, order: Order): Promise<void> {
 async function rack(work: Work, tool: Tool): Promise<void> {
   tool.state = 'on the rack';
   await work.em.flush();
-  await logDeed(work, { action: `put ${tool.kind} ${tool.number} on the rack`, subjectKind: 'tool', subjectId: tool.id });
+  await logDeed(work, {
+    action: `put ${tool.kind} ${tool.number} on the rack`,
+    subjectKind: 'tool',
+    subjectId: tool.id,
+  });
 }
 
 async function makeReady(work: Work, order: Order): Promise<void> {
   const job = await work.em.findOneOrFail(Job, { orderId: order.id });
   job.state = 'ready';
   await work.em.flush();
-  await logDeed(work, { action: `laid ${job.number} ready for the bench`, subjectKind: 'job', subjectId: job.id });
+  await logDeed(work, {
+    action: `laid ${job.number} ready for the bench`,
+    subjectKind: 'job',
+    subjectId: job.id,
+  });
 }
 
 function notAwaited(order: Order, what: Awaited) {

@@ -1,7 +1,12 @@
 import type { BenchDay, BenchHours } from '@hidewright/contract';
 import { addDays } from '@hidewright/domain';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
-import { planDays, shortByPromise, type Bench, type PlannedDay } from '../modules/jobs/bench-plan.ts';
+import {
+  planDays,
+  shortByPromise,
+  type Bench,
+  type PlannedDay,
+} from '../modules/jobs/bench-plan.ts';
 import type { Work } from '../work.ts';
 import { benchToday, openJobs, type OpenJob } from './bench-load.ts';
 
@@ -19,7 +24,11 @@ export async function planBench(work: Work, days: number): Promise<BenchHours> {
   };
 }
 
-function toDay(bench: Bench, { day, capacity, shares }: PlannedDay, jobs: readonly OpenJob[]): BenchDay {
+function toDay(
+  bench: Bench,
+  { day, capacity, shares }: PlannedDay,
+  jobs: readonly OpenJob[],
+): BenchDay {
   const used = shares.reduce((sum, { minutes }) => sum + minutes, 0);
   const logged = day === bench.today ? bench.loggedToday : 0;
   return {

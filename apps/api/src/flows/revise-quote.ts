@@ -43,17 +43,23 @@ async function nextRevision(work: Work, quote: Quote): Promise<number> {
   const all = await work.em.find(Quote, { number: quote.number });
   const draft = all.find((each) => each.state === 'draft');
   if (draft !== undefined) {
-    throw wrongState(`Revision ${draft.revision} of quote ${quote.number} is a draft already. Go on with that one.`);
+    throw wrongState(
+      `Revision ${draft.revision} of quote ${quote.number} is a draft already. Go on with that one.`,
+    );
   }
   const agreed = all.find((each) => each.state === 'agreed');
   if (agreed !== undefined) {
-    throw wrongState(`Revision ${agreed.revision} of quote ${quote.number} has been agreed. Take the order on from it.`);
+    throw wrongState(
+      `Revision ${agreed.revision} of quote ${quote.number} has been agreed. Take the order on from it.`,
+    );
   }
   return Math.max(...all.map((each) => each.revision)) + 1;
 }
 
 async function copyRungs(work: Work, fromId: number, toId: number): Promise<void> {
-  for (const { quantity, typedPrice, priceEach, total } of await work.em.find(QuoteBreak, { quoteId: fromId })) {
+  for (const { quantity, typedPrice, priceEach, total } of await work.em.find(QuoteBreak, {
+    quoteId: fromId,
+  })) {
     work.em.create(QuoteBreak, { quoteId: toId, quantity, typedPrice, priceEach, total });
   }
   await work.em.flush();

@@ -1,4 +1,10 @@
-import { minorDigits, type Layout, type RunHardware, type RunInput, type WorkPlan } from '@hidewright/domain';
+import {
+  minorDigits,
+  type Layout,
+  type RunHardware,
+  type RunInput,
+  type WorkPlan,
+} from '@hidewright/domain';
 import type { PatternDefinition, QuoteBody } from '@hidewright/contract';
 import { priceText } from '../http/decimal-text.ts';
 import { invalid } from '../http/problem.ts';
@@ -25,8 +31,15 @@ export async function runInputFor(
   return {
     breaks,
     confidencePercent: workshop.confidencePercent.toString(),
-    layout: { form: layout.container.form, pieces: layout.pieces, containerAreaMm2: layout.containerAreaMm2 },
-    leather: { name: leather.name, pricePerFt2: overrides.leatherPricePerFt2 ?? priceText(leather.pricePerFt2) },
+    layout: {
+      form: layout.container.form,
+      pieces: layout.pieces,
+      containerAreaMm2: layout.containerAreaMm2,
+    },
+    leather: {
+      name: leather.name,
+      pricePerFt2: overrides.leatherPricePerFt2 ?? priceText(leather.pricePerFt2),
+    },
     hardware: await hardwareOf(work, definition),
     tooling,
     work: workPlanOf(definition.work, overrides.rejectPercent),
@@ -39,18 +52,26 @@ export async function runInputFor(
   };
 }
 
-async function hardwareOf(work: Pick<Work, 'em'>, definition: PatternDefinition): Promise<RunHardware[]> {
+async function hardwareOf(
+  work: Pick<Work, 'em'>,
+  definition: PatternDefinition,
+): Promise<RunHardware[]> {
   const ids = definition.hardware.map(({ hardwareId }) => hardwareId);
-  const kinds = new Map((await work.em.find(Hardware, { id: { $in: ids } })).map((kind) => [kind.id, kind]));
+  const kinds = new Map(
+    (await work.em.find(Hardware, { id: { $in: ids } })).map((kind) => [kind.id, kind]),
+  );
   return definition.hardware.flatMap(({ hardwareId, perPiece }) => {
     const kind = kinds.get(hardwareId);
-    return kind === undefined ? [] : [{ name: kind.name, unitPrice: priceText(kind.unitPrice), perPiece }];
+    return kind === undefined
+      ? []
+      : [{ name: kind.name, unitPrice: priceText(kind.unitPrice), perPiece }];
   });
 }
 
 function workPlanOf(plan: WorkPlan, rejectsByHand: string | undefined): WorkPlan {
   if (rejectsByHand === undefined) return plan;
   if (plan.kind === 'minutesPer100') return { ...plan, rejectPercent: rejectsByHand };
-  const message = 'This pattern has its rejects at each step. Change them in the pattern, and leave this empty.';
+  const message =
+    'This pattern has its rejects at each step. Change them in the pattern, and leave this empty.';
   throw invalid([{ field: 'overrides.rejectPercent', message }]);
 }

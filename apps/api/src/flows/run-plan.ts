@@ -1,4 +1,12 @@
-import { benchMinutes, priceRun, ticketSteps, toAtMost, type RunInput, type RunNumbers, type WorkPlan } from '@hidewright/domain';
+import {
+  benchMinutes,
+  priceRun,
+  ticketSteps,
+  toAtMost,
+  type RunInput,
+  type RunNumbers,
+  type WorkPlan,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
@@ -45,9 +53,22 @@ export async function planRun(em: EntityManager, quote: Quote, quantity: number)
   const { cutCount, containers, leatherAreaMm2 } = run;
   const steps = planSteps(input.work, { pieces: cutCount, containers });
   return {
-    ...{ quantity, cutCount, containers, leatherAreaMm2, leatherId, needsDie, needsPlate, steps, input },
+    ...{
+      quantity,
+      cutCount,
+      containers,
+      leatherAreaMm2,
+      leatherId,
+      needsDie,
+      needsPlate,
+      steps,
+      input,
+    },
     patternId: version.patternId,
-    hardware: hardware.map(({ hardwareId, perPiece }) => ({ hardwareId, quantity: perPiece * quantity })),
+    hardware: hardware.map(({ hardwareId, perPiece }) => ({
+      hardwareId,
+      quantity: perPiece * quantity,
+    })),
     plannedMinutes: steps.reduce((sum, step) => sum.plus(step.plannedMinutes), new Decimal(0)),
   };
 }

@@ -13,13 +13,23 @@ import { supersedeOthers } from './supersede-quotes.ts';
  * link, by a mail in the outbox or by hand.
  * @throws {Problem} 409 when it is no draft; 422 when it cannot go by mail, or its day in hands is over
  */
-export async function sendQuote(work: Work, quoteId: number, way: Way, drawn: QuoteOnPaper): Promise<HandedOver> {
+export async function sendQuote(
+  work: Work,
+  quoteId: number,
+  way: Way,
+  drawn: QuoteOnPaper,
+): Promise<HandedOver> {
   const quote = await work.em.findOne(Quote, quoteId);
   if (quote === null) throw notFound('quote');
   requirePossible(quote, 'send');
   requireSame(quote, drawn);
   if (quote.inHandsOn !== null && quote.inHandsOn < work.today) {
-    throw invalid([{ field: 'inHandsOn', message: 'The day in hands is over. Choose a later one, then send the quote.' }]);
+    throw invalid([
+      {
+        field: 'inHandsOn',
+        message: 'The day in hands is over. Choose a later one, then send the quote.',
+      },
+    ]);
   }
   await supersedeOthers(work, quote);
   quote.state = 'sent';
@@ -39,5 +49,8 @@ export async function sendQuote(work: Work, quoteId: number, way: Way, drawn: Qu
 
 function requireSame(quote: Quote, drawn: QuoteOnPaper): void {
   if (quote.version === drawn.version) return;
-  throw wrongState(`Quote ${quote.number} was changed while its paper was drawn. Look at it again, then send it.`, ['send']);
+  throw wrongState(
+    `Quote ${quote.number} was changed while its paper was drawn. Look at it again, then send it.`,
+    ['send'],
+  );
 }

@@ -11,6 +11,14 @@ export async function startIfReady(work: Work, job: Job): Promise<void> {
   const order = await findOrder(work.em, job.orderId);
   order.state = 'in work';
   await work.em.flush();
-  await logDeed(work, { action: `brought ${job.number} to the bench`, subjectKind: 'job', subjectId: job.id });
-  await logDeed(work, { action: `began work on ${order.number}`, subjectKind: 'order', subjectId: order.id });
+  await logDeed(work, {
+    action: `brought ${job.number} to the bench`,
+    subjectKind: 'job',
+    subjectId: job.id,
+  });
+  await logDeed(work, {
+    action: `began work on ${order.number}`,
+    subjectKind: 'order',
+    subjectId: order.id,
+  });
 }

@@ -26,7 +26,12 @@ export async function takeForJob(work: Work, jobId: number, taking: Taking): Pro
     const quantity = scaled(new Decimal(taking.areaMm2), 3);
     await takeStock(work, { jobId, lotId: taking.lotId, quantity, reason });
   } else {
-    await takeStock(work, { jobId, hardwareId: taking.hardwareId, quantity: taking.quantity, reason });
+    await takeStock(work, {
+      jobId,
+      hardwareId: taking.hardwareId,
+      quantity: taking.quantity,
+      reason,
+    });
   }
   await startIfReady(work, job);
   return job;

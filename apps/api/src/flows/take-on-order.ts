@@ -50,17 +50,23 @@ export async function takeOnOrder(work: Work, asked: TakingOn): Promise<Order> {
 
 async function refuseTwice(em: EntityManager, quote: Quote): Promise<void> {
   const order = await em.findOne(Order, { quoteId: quote.id });
-  if (order !== null) throw wrongState(`${quote.number} has been taken on as ${order.number}. Open that order.`, ['open the order']);
+  if (order !== null)
+    throw wrongState(`${quote.number} has been taken on as ${order.number}. Open that order.`, [
+      'open the order',
+    ]);
 }
 
 function agreedQuantity(quote: Quote): number {
-  if (quote.agreedQuantity === null) throw new TypeError('An agreed quote has the quantity that was agreed');
+  if (quote.agreedQuantity === null)
+    throw new TypeError('An agreed quote has the quantity that was agreed');
   return quote.agreedQuantity;
 }
 
 /** Tooling that is awaited need not be here. */
 function refuseShort(check: RunCheck, awaits: readonly Awaited[]): void {
-  const short = check.answers.filter(({ about, enough }) => !enough && !(about === 'tooling' && awaits.includes('tooling')));
+  const short = check.answers.filter(
+    ({ about, enough }) => !enough && !(about === 'tooling' && awaits.includes('tooling')),
+  );
   if (short.length === 0) return;
   throw wrongState(`Not all is there. ${short.map(({ sentence }) => sentence).join(' ')}`, [
     'buy what is short',
@@ -76,7 +82,12 @@ const toEstimate = ({ input, leatherId, leatherAreaMm2, hardware }: RunPlan): Jo
   hardware,
 });
 
-async function makeOrder(work: Work, quote: Quote, asked: TakingOn, numbers: BreakNumbers): Promise<Order> {
+async function makeOrder(
+  work: Work,
+  quote: Quote,
+  asked: TakingOn,
+  numbers: BreakNumbers,
+): Promise<Order> {
   const awaits = sortAwaits(asked.awaits);
   const order = work.em.create(Order, {
     number: await drawPaperNumber(work.em, 'O'),
@@ -96,11 +107,22 @@ async function makeOrder(work: Work, quote: Quote, asked: TakingOn, numbers: Bre
   });
   await work.em.flush();
   const detail = { quote: quote.number, promisedOn: order.promisedOn, awaits };
-  await logDeed(work, { action: `took on ${order.number}`, subjectKind: 'order', subjectId: order.id, detail });
+  await logDeed(work, {
+    action: `took on ${order.number}`,
+    subjectKind: 'order',
+    subjectId: order.id,
+    detail,
+  });
   return order;
 }
 
-async function makeJob(work: Work, quote: Quote, order: Order, plan: RunPlan, estimate: JobEstimate): Promise<Job> {
+async function makeJob(
+  work: Work,
+  quote: Quote,
+  order: Order,
+  plan: RunPlan,
+  estimate: JobEstimate,
+): Promise<Job> {
   const job = work.em.create(Job, {
     number: await drawPaperNumber(work.em, 'J'),
     orderId: order.id,
@@ -118,14 +140,23 @@ async function makeJob(work: Work, quote: Quote, order: Order, plan: RunPlan, es
     work.em.create(JobStep, { ...step, jobId: job.id, position: at + 1, minutes: new Decimal(0) }),
   );
   await work.em.flush();
-  await logDeed(work, { action: `wrote ticket ${job.number}`, subjectKind: 'job', subjectId: job.id, detail: { order: order.number } });
+  await logDeed(work, {
+    action: `wrote ticket ${job.number}`,
+    subjectKind: 'job',
+    subjectId: job.id,
+    detail: { order: order.number },
+  });
   return job;
 }
 
 /** Holds what is free of what is needed: all of it, unless the owner took it on although something is short. */
 async function holdStock(work: Work, job: Job, plan: RunPlan, check: RunCheck): Promise<void> {
   for (const { lotId, takesAreaMm2 } of check.lots) {
-    await reserveStock(work, { jobId: job.id, lotId, quantity: scaled(new Decimal(takesAreaMm2), 3) });
+    await reserveStock(work, {
+      jobId: job.id,
+      lotId,
+      quantity: scaled(new Decimal(takesAreaMm2), 3),
+    });
   }
   for (const { hardwareId, quantity } of plan.hardware) {
     const { free } = await freeOf(work.em, { hardwareId });

@@ -29,7 +29,8 @@ export async function usedBy(em: EntityManager, job: Job, steps: JobStep[]): Pro
   };
 }
 
-const taken = (moved: readonly StockMovement[]): number => moved.reduce((sum, { quantity }) => sum - quantity, 0);
+const taken = (moved: readonly StockMovement[]): number =>
+  moved.reduce((sum, { quantity }) => sum - quantity, 0);
 
 const costOf = (moved: readonly StockMovement[]): Decimal =>
   moved.reduce((sum, { value }) => sum.minus(value), new Decimal(0));

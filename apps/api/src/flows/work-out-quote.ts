@@ -13,13 +13,7 @@ import { runInputFor } from './run-input.ts';
 /** All of a draft that follows from what was typed. */
 type WorkedOut = Pick<
   Quote,
-  | 'customerId'
-  | 'patternVersionId'
-  | 'layoutId'
-  | 'title'
-  | 'inHandsOn'
-  | 'overrides'
-  | 'message'
+  'customerId' | 'patternVersionId' | 'layoutId' | 'title' | 'inHandsOn' | 'overrides' | 'message'
 > & { input: RunInput; numbers: RunNumbers };
 
 /**
@@ -27,7 +21,11 @@ type WorkedOut = Pick<
  * @throws {Problem} 422 when the customer does not exist, or the day in hands is over
  * @throws {InvalidInput | NotWorkable} when the run cannot be priced
  */
-export async function workOutQuote(work: Work, asked: QuoteBody, laid: LaidPattern): Promise<WorkedOut> {
+export async function workOutQuote(
+  work: Work,
+  asked: QuoteBody,
+  laid: LaidPattern,
+): Promise<WorkedOut> {
   await requireCustomer(work, asked.customerId);
   requireToCome(work, asked.inHandsOn);
   const layout = await keepLayout(work, laid.worked);
@@ -46,7 +44,11 @@ export async function workOutQuote(work: Work, asked: QuoteBody, laid: LaidPatte
 }
 
 /** Keeps the rungs as rows of their own, where they can be looked up and agreed to. */
-export async function keepRungs(work: Work, quoteId: number, { input, numbers }: WorkedOut): Promise<void> {
+export async function keepRungs(
+  work: Work,
+  quoteId: number,
+  { input, numbers }: WorkedOut,
+): Promise<void> {
   for (const rung of numbers.breaks) {
     const typed = input.breaks.find((each) => each.quantity === rung.quantity)?.typedPrice ?? null;
     work.em.create(QuoteBreak, rungRow(quoteId, rung, typed));
@@ -64,15 +66,22 @@ const rungRow = (quoteId: number, rung: BreakNumbers, typed: string | null) => (
 
 async function requireCustomer(work: Work, id: number): Promise<void> {
   if ((await work.em.findOne(Customer, id)) !== null) return;
-  throw invalid([{ field: 'customerId', message: 'Choose a customer from the list, or add a new one.' }]);
+  throw invalid([
+    { field: 'customerId', message: 'Choose a customer from the list, or add a new one.' },
+  ]);
 }
 
 function requireToCome(work: Work, inHandsOn: string | null): void {
   if (inHandsOn === null || inHandsOn >= work.today) return;
-  throw invalid([{ field: 'inHandsOn', message: 'That day is over. Choose a day to come, or leave it empty.' }]);
+  throw invalid([
+    { field: 'inHandsOn', message: 'That day is over. Choose a day to come, or leave it empty.' },
+  ]);
 }
 
-function setByHand({ rejectPercent, leatherPricePerFt2 }: QuoteBody['overrides']): Quote['overrides'] {
+function setByHand({
+  rejectPercent,
+  leatherPricePerFt2,
+}: QuoteBody['overrides']): Quote['overrides'] {
   return {
     ...(rejectPercent !== undefined && { rejectPercent }),
     ...(leatherPricePerFt2 !== undefined && { leatherPricePerFt2 }),

@@ -21,7 +21,13 @@ export function blankPaper(title: string, author: string, made: Date): Paper {
   const paper = new PDFDocument({
     size: 'A4',
     margins: { top: sheet.top, bottom: 40, left: sheet.left, right: sheet.width - sheet.right },
-    info: { Title: title, Author: author, Creator: 'Hidewright', CreationDate: made, ModDate: made },
+    info: {
+      Title: title,
+      Author: author,
+      Creator: 'Hidewright',
+      CreationDate: made,
+      ModDate: made,
+    },
     lang: 'en',
   });
   paper.registerFont('plain', font('400Regular/NotoSans_400Regular'));
@@ -49,15 +55,39 @@ export function stitchAcross(paper: Paper, y: number): void {
 }
 
 /** The head of a ticket: manila, with its eyelet, its number and whom it is for. */
-export function ticketHead(paper: Paper, head: { number: string; shop: string; name: string; about: string }): void {
+export function ticketHead(
+  paper: Paper,
+  head: { number: string; shop: string; name: string; about: string },
+): void {
   const { left, right, top } = sheet;
-  paper.save().rect(left, top, right - left, 84).fill(manila).restore();
-  paper.save().lineWidth(2).circle(left + 20, top + 22, 6).fillAndStroke('#FFFFFF', '#8C7F63').restore();
+  paper
+    .save()
+    .rect(left, top, right - left, 84)
+    .fill(manila)
+    .restore();
+  paper
+    .save()
+    .lineWidth(2)
+    .circle(left + 20, top + 22, 6)
+    .fillAndStroke('#FFFFFF', '#8C7F63')
+    .restore();
   paper.fillColor(ink).font('strong').fontSize(13);
   paper.text(head.number, left + 38, top + 12, { lineBreak: false });
-  paper.fontSize(11).text(head.shop, left + 200, top + 14, { width: right - left - 214, align: 'right', lineBreak: false });
-  paper.fontSize(17).text(head.name, left + 38, top + 32, { width: right - left - 60, height: 24, ellipsis: true });
+  paper
+    .fontSize(11)
+    .text(head.shop, left + 200, top + 14, {
+      width: right - left - 214,
+      align: 'right',
+      lineBreak: false,
+    });
+  paper
+    .fontSize(17)
+    .text(head.name, left + 38, top + 32, { width: right - left - 60, height: 24, ellipsis: true });
   paper.font('plain').fontSize(10).fillColor(inkSoft);
-  paper.text(head.about, left + 38, top + 60, { width: right - left - 60, height: 16, ellipsis: true });
+  paper.text(head.about, left + 38, top + 60, {
+    width: right - left - 60,
+    height: 16,
+    ellipsis: true,
+  });
   paper.fillColor(ink);
 }

@@ -36,7 +36,12 @@ export async function readyForTheBench(shop: Shop): Promise<BenchShop> {
   const make = async (path: string, body: object) =>
     (await owner.post(`/api/${path}`).send(body).expect(201)).body as { id: number };
   const leather = await make('leathers', { name: 'Oak tan 5–6 oz', pricePerFt2: '9.5' });
-  const rivet = await make('hardware', { name: 'Rivet 9 mm', kind: 'hardware', unitPrice: '0.17', packSize: 100 });
+  const rivet = await make('hardware', {
+    name: 'Rivet 9 mm',
+    kind: 'hardware',
+    unitPrice: '0.17',
+    packSize: 100,
+  });
   const definition = coaster(leather.id, {
     hardware: [{ hardwareId: rivet.id, perPiece: 2 }],
     work: { kind: 'steps', steps } as never,
@@ -52,13 +57,37 @@ export async function readyForTheBench(shop: Shop): Promise<BenchShop> {
   const receipt = await owner
     .post('/api/receipts')
     .send({
-      lots: [{ leatherId: leather.id, tag: 'OT-118', form: 'side', measuredAreaMm2: lotAreaMm2, cost: '120.00', place: 'rack 2' }],
+      lots: [
+        {
+          leatherId: leather.id,
+          tag: 'OT-118',
+          form: 'side',
+          measuredAreaMm2: lotAreaMm2,
+          cost: '120.00',
+          place: 'rack 2',
+        },
+      ],
       hardware: [{ hardwareId: rivet.id, quantity: 300, cost: '51.00' }],
     })
     .expect(201);
   const tool = { cost: '90.00', patternId: pattern.id };
-  const die = await make('tools', { ...tool, kind: 'cutting die', name: 'Coaster 95 mm', number: '7', lifeUses: 50_000, slot: 'C3' });
-  const plate = await make('tools', { ...tool, kind: 'stamp plate', name: 'Bramble', number: '41', metal: 'magnesium', lifeUses: 2_000, customerId: customer.id });
+  const die = await make('tools', {
+    ...tool,
+    kind: 'cutting die',
+    name: 'Coaster 95 mm',
+    number: '7',
+    lifeUses: 50_000,
+    slot: 'C3',
+  });
+  const plate = await make('tools', {
+    ...tool,
+    kind: 'stamp plate',
+    name: 'Bramble',
+    number: '41',
+    metal: 'magnesium',
+    lifeUses: 2_000,
+    customerId: customer.id,
+  });
   const lots = (receipt.body as { lots: { id: number }[] }).lots;
   return {
     shop,
@@ -73,13 +102,25 @@ export async function readyForTheBench(shop: Shop): Promise<BenchShop> {
 }
 
 /** A quote that the customer agreed to by phone. */
-export async function agreedQuote(ready: BenchShop, quantity = 50, change: object = {}): Promise<Quote> {
+export async function agreedQuote(
+  ready: BenchShop,
+  quantity = 50,
+  change: object = {},
+): Promise<Quote> {
   const quote = await draftQuote(ready, change);
-  const agreed = await ready.shop.as('owner').post(`/api/quotes/${quote.id}/agreements`).send({ quantity, how: 'phone' }).expect(200);
+  const agreed = await ready.shop
+    .as('owner')
+    .post(`/api/quotes/${quote.id}/agreements`)
+    .send({ quantity, how: 'phone' })
+    .expect(200);
   return agreed.body as Quote;
 }
 
-export async function takenOn(ready: BenchShop, quantity = 50, change: object = {}): Promise<Order> {
+export async function takenOn(
+  ready: BenchShop,
+  quantity = 50,
+  change: object = {},
+): Promise<Order> {
   const quote = await agreedQuote(ready, quantity);
   const body = { quoteId: quote.id, promisedOn: '2026-12-16', ...change };
   return (await ready.shop.as('owner').post('/api/orders').send(body).expect(201)).body as Order;
@@ -90,6 +131,13 @@ export async function ticketOf(ready: BenchShop, order: Order): Promise<Job> {
 }
 
 export async function setBenchHours({ shop }: BenchShop, benchHoursPerDay: string): Promise<void> {
-  const { version } = (await shop.as('owner').get('/api/workshop').expect(200)).body as { version: number };
-  await shop.as('owner').patch('/api/workshop').set('If-Match', `"${version}"`).send({ benchHoursPerDay }).expect(200);
+  const { version } = (await shop.as('owner').get('/api/workshop').expect(200)).body as {
+    version: number;
+  };
+  await shop
+    .as('owner')
+    .patch('/api/workshop')
+    .set('If-Match', `"${version}"`)
+    .send({ benchHoursPerDay })
+    .expect(200);
 }

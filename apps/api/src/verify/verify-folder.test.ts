@@ -3,16 +3,16 @@ import os from 'node:os';
 import path from 'node:path';
 import { knex } from '@mikro-orm/sqlite';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { databaseFile, readConfig } from '../config.ts';
-import { makeDemo } from '../seeders/demo/make-demo.ts';
+import { databaseFile } from '../config.ts';
+import { demoFolder } from '../testing/demo-folder.ts';
 import { verifyFolder } from './verify-folder.ts';
 
 let folder: string;
-const demo = () => path.join(folder, 'demo');
+let demo: string;
 
 beforeAll(async () => {
   folder = await mkdtemp(path.join(os.tmpdir(), 'hidewright-verify-'));
-  await makeDemo(readConfig({ DATA_DIR: demo(), MODE: 'demo', DEMO_DAY: '2026-12-01', LOG_LEVEL: 'silent' }));
+  demo = (await demoFolder()).dataDir;
 }, 300_000);
 
 afterAll(async () => {
@@ -22,7 +22,7 @@ afterAll(async () => {
 /** Alters a copy as somebody would who goes behind the program's back: its triggers are taken away first. */
 async function alteredCopy(sql: string): Promise<string> {
   const copy = await mkdtemp(path.join(folder, 'altered-'));
-  await cp(demo(), copy, { recursive: true });
+  await cp(demo, copy, { recursive: true });
   const connection = knex({ client: 'sqlite3', connection: { filename: databaseFile(copy) }, useNullAsDefault: true });
   const triggers = (await connection.raw(`SELECT name FROM sqlite_master WHERE type = 'trigger'`)) as { name: string }[];
   for (const { name } of triggers) await connection.raw(`DROP TRIGGER ${name}`);
@@ -36,7 +36,7 @@ const broken = async (copy: string) => (await verifyFolder(copy)).filter((rule) 
 
 describe('verifying a data folder', () => {
   it('finds nothing wrong with the demo', async () => {
-    expect(await broken(demo())).toEqual([]);
+    expect(await broken(demo)).toEqual([]);
   });
 
   it.each([
@@ -68,7 +68,7 @@ describe('verifying a data folder', () => {
 
   it('notices a kept file that was altered or is gone', async () => {
     const copy = await mkdtemp(path.join(folder, 'altered-'));
-    await cp(demo(), copy, { recursive: true });
+    await cp(demo, copy, { recursive: true });
     await rm(path.join(copy, 'files'), { recursive: true });
     expect(await broken(copy)).toEqual([expect.stringContaining('Every kept file')]);
   });

@@ -14,7 +14,11 @@ export interface NeededHours {
 }
 
 /** The bench hours that are free until a day, beside what has been promised before. */
-export async function hoursForCheck(work: Work, minutes: Decimal, by: string): Promise<NeededHours> {
+export async function hoursForCheck(
+  work: Work,
+  minutes: Decimal,
+  by: string,
+): Promise<NeededHours> {
   const bench = await benchToday(work);
   const jobs = await openJobs(work.em);
   const earliest = earliestDay(bench, jobs, scaled(minutes, 2));

@@ -16,6 +16,8 @@ export async function freeLotsOf(em: EntityManager, leatherId: number): Promise<
   return lots.flatMap(({ id, tag, place, receivedOn }) => {
     const balance = balances.find(({ lotId }) => lotId === id);
     const free = balance === undefined ? 0 : balance.onHand - balance.reserved;
-    return free > 0 ? [{ lotId: id, tag, place, receivedOn, freeAreaMm2: unscaled(free, 3).toString() }] : [];
+    return free > 0
+      ? [{ lotId: id, tag, place, receivedOn, freeAreaMm2: unscaled(free, 3).toString() }]
+      : [];
   });
 }

@@ -22,10 +22,14 @@ export interface NeededTool {
 
 /** The die and the plate that a run needs: on the rack, with life left. */
 export async function toolingForCheck(em: EntityManager, asked: Asked): Promise<NeededTool[]> {
-  const kinds = [asked.needsPlate ? 'stamp plate' : null, asked.needsDie ? 'cutting die' : null] as const;
+  const kinds = [
+    asked.needsPlate ? 'stamp plate' : null,
+    asked.needsDie ? 'cutting die' : null,
+  ] as const;
   const needed: NeededTool[] = [];
   for (const kind of kinds) {
-    if (kind !== null) needed.push(toolForCheck(kind, await toolsFor(em, kind, asked), asked.strikes));
+    if (kind !== null)
+      needed.push(toolForCheck(kind, await toolsFor(em, kind, asked), asked.strikes));
   }
   return needed;
 }

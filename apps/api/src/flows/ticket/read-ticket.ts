@@ -31,8 +31,34 @@ export async function readTicket(em: EntityManager, jobId: number): Promise<Tick
 }
 
 function ownFields(job: Job) {
-  const { id, number, state, orderId, quantity, cutCount, containers, good, seconds, startedAt, finishedAt, version } = job;
-  return { id, number, state, orderId, quantity, cutCount, containers, good, seconds, startedAt, finishedAt, version };
+  const {
+    id,
+    number,
+    state,
+    orderId,
+    quantity,
+    cutCount,
+    containers,
+    good,
+    seconds,
+    startedAt,
+    finishedAt,
+    version,
+  } = job;
+  return {
+    id,
+    number,
+    state,
+    orderId,
+    quantity,
+    cutCount,
+    containers,
+    good,
+    seconds,
+    startedAt,
+    finishedAt,
+    version,
+  };
 }
 
 async function orderFields(em: EntityManager, job: Job) {
@@ -57,7 +83,8 @@ async function madeOf(em: EntityManager, job: Job) {
   const leather = await em.findOneOrFail(Leather, leatherId);
   const stock = await stockOfJob(em, job.id);
   const { customerId } = await findOrder(em, job.orderId);
-  const tool = (kind: 'cutting die' | 'stamp plate') => ticketTool(em, job, { kind, patternId: pattern.id, customerId });
+  const tool = (kind: 'cutting die' | 'stamp plate') =>
+    ticketTool(em, job, { kind, patternId: pattern.id, customerId });
   return {
     patternId: pattern.id,
     patternName: pattern.name,

@@ -29,9 +29,16 @@ export function ticketSteps(job: Job, steps: readonly JobStep[]): StepReply[] {
 }
 
 /** What was logged, newest first. */
-export async function ticketLogs(em: EntityManager, steps: readonly JobStep[]): Promise<LogReply[]> {
+export async function ticketLogs(
+  em: EntityManager,
+  steps: readonly JobStep[],
+): Promise<LogReply[]> {
   const names = new Map(steps.map(({ id, name }) => [id, name]));
-  const rows = await em.find(BenchLog, { jobStepId: { $in: [...names.keys()] } }, { orderBy: { id: 'desc' } });
+  const rows = await em.find(
+    BenchLog,
+    { jobStepId: { $in: [...names.keys()] } },
+    { orderBy: { id: 'desc' } },
+  );
   return rows.map((row) => ({
     id: row.id,
     stepId: row.jobStepId,

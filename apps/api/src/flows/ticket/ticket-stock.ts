@@ -36,9 +36,17 @@ function same(item: Partial<Keyed>): (row: Keyed) => boolean {
 const areaText = (quantity: number): string => unscaled(quantity, 3).toString();
 
 /** The lots that the job holds or has taken from, and those of its leather that still have something free. */
-export async function ticketLots(em: EntityManager, stock: JobStock, leatherId: number): Promise<JobLot[]> {
+export async function ticketLots(
+  em: EntityManager,
+  stock: JobStock,
+  leatherId: number,
+): Promise<JobLot[]> {
   const own = stock.rows.flatMap(({ lotId }) => (lotId === null ? [] : [lotId]));
-  const lots = await em.find(Lot, { $or: [{ leatherId }, { id: { $in: own } }] }, { orderBy: { id: 'asc' } });
+  const lots = await em.find(
+    Lot,
+    { $or: [{ leatherId }, { id: { $in: own } }] },
+    { orderBy: { id: 'asc' } },
+  );
   const free = await freeByItem(em, { lotId: { $in: lots.map(({ id }) => id) } });
   return lots
     .map((lot) => ({

@@ -13,13 +13,21 @@ interface Asked {
 }
 
 /** The tool that the job was struck with, or else the one on the rack that it will be. */
-export async function ticketTool(em: EntityManager, job: Job, asked: Asked): Promise<JobTool | null> {
+export async function ticketTool(
+  em: EntityManager,
+  job: Job,
+  asked: Asked,
+): Promise<JobTool | null> {
   const used = await toolUsedBy(em, job.id, asked.kind);
   const tool = used ?? chooseTool(await toolsFor(em, asked.kind, asked), job.cutCount);
   return tool === undefined ? null : toReply(tool);
 }
 
-async function toolUsedBy(em: EntityManager, jobId: number, kind: Tool['kind']): Promise<Tool | undefined> {
+async function toolUsedBy(
+  em: EntityManager,
+  jobId: number,
+  kind: Tool['kind'],
+): Promise<Tool | undefined> {
   const impressions = await em.find(Impression, { jobId });
   const tools = await em.find(Tool, { id: { $in: impressions.map(({ toolId }) => toolId) }, kind });
   return tools[0];

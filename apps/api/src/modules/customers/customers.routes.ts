@@ -26,7 +26,9 @@ export function customerRoutes(context: Context): Router {
       {
         ...(below === undefined ? {} : { id: { $lt: below } }),
         ...(query.active === undefined ? {} : { active: query.active === 'yes' }),
-        ...(query.q === undefined ? {} : { $or: ['name', 'contactName', 'email'].map(like(query.q)) }),
+        ...(query.q === undefined
+          ? {}
+          : { $or: ['name', 'contactName', 'email'].map(like(query.q)) }),
       },
       { orderBy: { id: 'desc' }, limit: query.limit + 1 },
     );
@@ -34,7 +36,9 @@ export function customerRoutes(context: Context): Router {
     return { items: items.map(toReply), next };
   });
 
-  serve(router, context, readCustomer, async (work, { params }) => toReply(await find(work, params.id)));
+  serve(router, context, readCustomer, async (work, { params }) =>
+    toReply(await find(work, params.id)),
+  );
 
   serve(router, context, addCustomer, async (work, { body }) => {
     await requireOwnName(work, body.name);
@@ -50,7 +54,11 @@ export function customerRoutes(context: Context): Router {
 
   serve(router, context, changeCustomer, async (work, { params, body, ifMatch }) => {
     const customer = await find(work, params.id);
-    await requireVersion(work.em, { kind: 'customer', id: customer.id, version: customer.version }, ifMatch);
+    await requireVersion(
+      work.em,
+      { kind: 'customer', id: customer.id, version: customer.version },
+      ifMatch,
+    );
     if (body.name !== undefined) await requireOwnName(work, body.name, customer.id);
     assignDefined(customer, body);
     await work.em.flush();
@@ -76,7 +84,8 @@ async function find(work: Work, id: number): Promise<Customer> {
 
 async function requireOwnName(work: Work, name: string, own = 0): Promise<void> {
   if ((await work.em.findOne(Customer, { name, id: { $ne: own } })) === null) return;
-  const message = 'There is a customer of that name already. Open that one, or add what tells the two apart.';
+  const message =
+    'There is a customer of that name already. Open that one, or add what tells the two apart.';
   throw invalid([{ field: 'name', message }]);
 }
 

@@ -1,25 +1,54 @@
 import { addDays } from '@hidewright/domain';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { earliestDay, freeUntil, planDays, shortByPromise, type Bench, type HeldWork } from './bench-plan.ts';
+import {
+  earliestDay,
+  freeUntil,
+  planDays,
+  shortByPromise,
+  type Bench,
+  type HeldWork,
+} from './bench-plan.ts';
 
 /** Tuesday; 6 hours a day. */
 const bench: Bench = { today: '2026-12-01', perDay: 36_000, loggedToday: 0 };
-const held = (jobId: number, promisedOn: string, remaining: number): HeldWork => ({ jobId, promisedOn, remaining });
+const held = (jobId: number, promisedOn: string, remaining: number): HeldWork => ({
+  jobId,
+  promisedOn,
+  remaining,
+});
 
 describe('planDays', () => {
   it('fills each day with the earliest promise and rests at the weekend', () => {
-    const days = planDays(bench, [held(2, '2026-12-09', 50_000), held(1, '2026-12-03', 40_000)], '2026-12-07');
+    const days = planDays(
+      bench,
+      [held(2, '2026-12-09', 50_000), held(1, '2026-12-03', 40_000)],
+      '2026-12-07',
+    );
     expect(days.map(({ day, shares }) => [day, shares])).toEqual([
       ['2026-12-01', [{ jobId: 1, minutes: 36_000 }]],
-      ['2026-12-02', [{ jobId: 1, minutes: 4_000 }, { jobId: 2, minutes: 32_000 }]],
+      [
+        '2026-12-02',
+        [
+          { jobId: 1, minutes: 4_000 },
+          { jobId: 2, minutes: 32_000 },
+        ],
+      ],
       ['2026-12-03', [{ jobId: 2, minutes: 18_000 }]],
       ['2026-12-04', []],
       ['2026-12-05', []],
       ['2026-12-06', []],
       ['2026-12-07', []],
     ]);
-    expect(days.map(({ capacity }) => capacity > 0)).toEqual([true, true, true, true, false, false, true]);
+    expect(days.map(({ capacity }) => capacity > 0)).toEqual([
+      true,
+      true,
+      true,
+      true,
+      false,
+      false,
+      true,
+    ]);
   });
 });
 
@@ -44,7 +73,11 @@ describe('freeUntil', () => {
 
 describe('shortByPromise', () => {
   it('names the work that cannot be done in time, and by how much', () => {
-    const work = [held(1, '2026-12-01', 30_000), held(2, '2026-12-01', 10_000), held(3, '2026-12-04', 5_000)];
+    const work = [
+      held(1, '2026-12-01', 30_000),
+      held(2, '2026-12-01', 10_000),
+      held(3, '2026-12-04', 5_000),
+    ];
     expect(shortByPromise(bench, work)).toEqual([{ jobId: 2, short: 4_000 }]);
   });
 });
@@ -55,12 +88,16 @@ describe('earliestDay', () => {
     expect(earliestDay(bench, [held(1, '2026-12-04', 144_000)], 1)).toBe('2026-12-07');
   });
 
-  it('is none where the shop has no hours', () => expect(earliestDay({ ...bench, perDay: 0 }, [], 1)).toBeNull());
+  it('is none where the shop has no hours', () =>
+    expect(earliestDay({ ...bench, perDay: 0 }, [], 1)).toBeNull());
 });
 
 describe('promises', () => {
   const work = fc.array(
-    fc.record({ days: fc.integer({ min: 0, max: 20 }), remaining: fc.integer({ min: 0, max: 80_000 }) }),
+    fc.record({
+      days: fc.integer({ min: 0, max: 20 }),
+      remaining: fc.integer({ min: 0, max: 80_000 }),
+    }),
     { maxLength: 8 },
   );
   const asHeld = (all: { days: number; remaining: number }[]) =>
@@ -82,9 +119,13 @@ describe('promises', () => {
   it('lose no minute of the work laid over the days', () => {
     fc.assert(
       fc.property(work, (all) => {
-        const laid = planDays(bench, asHeld(all), addDays(bench.today, 60)).flatMap(({ shares }) => shares);
+        const laid = planDays(bench, asHeld(all), addDays(bench.today, 60)).flatMap(
+          ({ shares }) => shares,
+        );
         const sum = (numbers: number[]) => numbers.reduce((total, each) => total + each, 0);
-        expect(sum(laid.map(({ minutes }) => minutes))).toBe(sum(all.map(({ remaining }) => remaining)));
+        expect(sum(laid.map(({ minutes }) => minutes))).toBe(
+          sum(all.map(({ remaining }) => remaining)),
+        );
       }),
     );
   });

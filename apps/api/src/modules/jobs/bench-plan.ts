@@ -35,7 +35,9 @@ export function capacityOn(bench: Bench, day: string): number {
 
 /** Earliest promise first: if any order of work keeps all promises, this one does (Jackson 1955, from memory). */
 export function byPromise(work: readonly HeldWork[]): HeldWork[] {
-  return [...work].sort((a, b) => (a.promisedOn < b.promisedOn ? -1 : a.promisedOn > b.promisedOn ? 1 : a.jobId - b.jobId));
+  return [...work].sort((a, b) =>
+    a.promisedOn < b.promisedOn ? -1 : a.promisedOn > b.promisedOn ? 1 : a.jobId - b.jobId,
+  );
 }
 
 /** The calendar days from the first to the last, both included. */
@@ -76,7 +78,10 @@ function capacityOf(bench: Bench): (until: Day) => number {
 }
 
 /** How much of each job cannot be done by its promised day; jobs that can are left out. */
-export function shortByPromise(bench: Bench, work: readonly HeldWork[]): { jobId: number; short: number }[] {
+export function shortByPromise(
+  bench: Bench,
+  work: readonly HeldWork[],
+): { jobId: number; short: number }[] {
   const capacity = capacityOf(bench);
   let before = 0;
   return byPromise(work).flatMap(({ jobId, promisedOn, remaining }) => {
@@ -101,7 +106,9 @@ function freeWithin(capacity: (until: Day) => number, work: readonly HeldWork[],
 }
 
 const promisedUntil = (work: readonly HeldWork[], day: Day): number =>
-  work.filter(({ promisedOn }) => promisedOn <= day).reduce((sum, { remaining }) => sum + remaining, 0);
+  work
+    .filter(({ promisedOn }) => promisedOn <= day)
+    .reduce((sum, { remaining }) => sum + remaining, 0);
 
 const furthest = 366;
 

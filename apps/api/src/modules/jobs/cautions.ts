@@ -16,11 +16,17 @@ const cautions: { fits: RegExp; caution: Caution }[] = [
   },
   {
     fits: /\b(hot|heat|foil|brand)/i,
-    caution: { level: 'CAUTION', text: `Hot metal: use the holder, and let it cool before you change it. ${manualFirst}` },
+    caution: {
+      level: 'CAUTION',
+      text: `Hot metal: use the holder, and let it cool before you change it. ${manualFirst}`,
+    },
   },
   {
     fits: /\b(stamp|strike|emboss|press|deboss)/i,
-    caution: { level: 'WARNING', text: `Hands clear before every stroke; never reach under a raised beam. ${manualFirst}` },
+    caution: {
+      level: 'WARNING',
+      text: `Hands clear before every stroke; never reach under a raised beam. ${manualFirst}`,
+    },
   },
   {
     fits: /\b(cut|click|punch|die)/i,
@@ -31,11 +37,17 @@ const cautions: { fits: RegExp; caution: Caution }[] = [
   },
   {
     fits: /\b(skive|skiving|split|trim|bevel|pare|slice)/i,
-    caution: { level: 'WARNING', text: `Open edge: cut away from your hand, cover the blade when you lay it down. ${manualFirst}` },
+    caution: {
+      level: 'WARNING',
+      text: `Open edge: cut away from your hand, cover the blade when you lay it down. ${manualFirst}`,
+    },
   },
   {
     fits: /\b(rivet|snap|eyelet|grommet|hammer|set)/i,
-    caution: { level: 'CAUTION', text: `Protect your eyes; use a soft mallet on setters, keep fingers off the anvil. ${manualFirst}` },
+    caution: {
+      level: 'CAUTION',
+      text: `Protect your eyes; use a soft mallet on setters, keep fingers off the anvil. ${manualFirst}`,
+    },
   },
 ];
 

@@ -16,11 +16,23 @@ export function stepsOf(em: EntityManager, jobId: number): Promise<JobStep[]> {
 }
 
 const refusals: Record<Job['state'], { because: string; allowed: string[] }> = {
-  waiting: { because: 'still waits for what its order awaits. Note on the order what has arrived', allowed: ['note what has arrived'] },
-  ready: { because: 'has not been begun. Take its leather, or log on its first step', allowed: ['take', 'log', 'finish'] },
-  'at the bench': { because: 'is at the bench. Log on its steps, pause it, or finish it', allowed: ['take', 'log', 'pause', 'finish'] },
+  waiting: {
+    because: 'still waits for what its order awaits. Note on the order what has arrived',
+    allowed: ['note what has arrived'],
+  },
+  ready: {
+    because: 'has not been begun. Take its leather, or log on its first step',
+    allowed: ['take', 'log', 'finish'],
+  },
+  'at the bench': {
+    because: 'is at the bench. Log on its steps, pause it, or finish it',
+    allowed: ['take', 'log', 'pause', 'finish'],
+  },
   paused: { because: 'is paused. Resume it first', allowed: ['resume'] },
-  finished: { because: 'is finished, and its counts are closed. Read its estimate and fact', allowed: ['read estimate and fact'] },
+  finished: {
+    because: 'is finished, and its counts are closed. Read its estimate and fact',
+    allowed: ['read estimate and fact'],
+  },
 };
 
 /** @throws {Problem} 409 with what the job's state does allow */

@@ -41,10 +41,17 @@ export async function findJobs(em: EntityManager, filter: JobFilter): Promise<Jo
   };
   if (filter.below !== undefined) where('j.id < ?', filter.below);
   if (filter.state !== undefined) where('j.state = ?', filter.state);
-  if (filter.open !== undefined) where(filter.open ? `j.state <> 'finished'` : `j.state = 'finished'`);
+  if (filter.open !== undefined)
+    where(filter.open ? `j.state <> 'finished'` : `j.state = 'finished'`);
   if (filter.q !== undefined) {
     const like = `%${filter.q}%`;
-    where('(j.number LIKE ? OR o.title LIKE ? OR c.name LIKE ? OR o.number LIKE ?)', like, like, like, like);
+    where(
+      '(j.number LIKE ? OR o.title LIKE ? OR c.name LIKE ? OR o.number LIKE ?)',
+      like,
+      like,
+      like,
+      like,
+    );
   }
   const rows = await em.execute<JobRow[]>(
     `SELECT j.id, j.number, j.state, j.order_id, o.title, c.name AS customer_name, j.quantity, j.cut_count, j.containers,
@@ -53,8 +60,17 @@ export async function findJobs(em: EntityManager, filter: JobFilter): Promise<Jo
     WHERE ${conditions.join(' AND ')} ORDER BY j.id DESC LIMIT ?`,
     [...values, filter.limit + 1],
   );
-  const steps = await em.find(JobStep, { jobId: { $in: rows.map(({ id }) => id) } }, { orderBy: { position: 'asc' } });
-  return rows.map((row) => toCard(row, steps.filter(({ jobId }) => jobId === row.id)));
+  const steps = await em.find(
+    JobStep,
+    { jobId: { $in: rows.map(({ id }) => id) } },
+    { orderBy: { position: 'asc' } },
+  );
+  return rows.map((row) =>
+    toCard(
+      row,
+      steps.filter(({ jobId }) => jobId === row.id),
+    ),
+  );
 }
 
 function toCard(row: JobRow, steps: JobStep[]): JobCard {

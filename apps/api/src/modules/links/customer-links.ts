@@ -7,7 +7,8 @@ const dayMs = 24 * 60 * 60_000;
 const daysBeyondOffer = 90;
 
 /** Only this is kept: who reads the database cannot make a link of it. */
-export const tokenHash = (token: string): string => createHash('sha256').update(token).digest('hex');
+export const tokenHash = (token: string): string =>
+  createHash('sha256').update(token).digest('hex');
 
 /** Makes a link of 256 random bits for a quote and gives its token, which can never be told again. */
 export async function issueLink(work: Work, quoteId: number, validUntil: string): Promise<string> {
@@ -15,7 +16,9 @@ export async function issueLink(work: Work, quoteId: number, validUntil: string)
   work.em.create(CustomerLink, {
     tokenHash: tokenHash(token),
     quoteId,
-    expiresAt: new Date(Date.parse(`${validUntil}T23:59:59.999Z`) + daysBeyondOffer * dayMs).toISOString(),
+    expiresAt: new Date(
+      Date.parse(`${validUntil}T23:59:59.999Z`) + daysBeyondOffer * dayMs,
+    ).toISOString(),
     createdAt: work.now.toISOString(),
   });
   await work.em.flush();
@@ -25,7 +28,8 @@ export async function issueLink(work: Work, quoteId: number, validUntil: string)
 /** The quote that a token opens now; nothing when it is unknown, has expired or was stopped. */
 export async function quoteBehind(work: Work, token: string): Promise<number | undefined> {
   const link = await work.em.findOne(CustomerLink, { tokenHash: tokenHash(token) });
-  if (link === null || link.revokedAt !== null || link.expiresAt <= work.now.toISOString()) return undefined;
+  if (link === null || link.revokedAt !== null || link.expiresAt <= work.now.toISOString())
+    return undefined;
   return link.quoteId;
 }
 

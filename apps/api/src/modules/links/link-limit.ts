@@ -12,9 +12,14 @@ export function linkLimit(): RequestHandler {
     standardHeaders: false,
     legacyHeaders: false,
     handler: () => {
-      throw new Problem(429, 'Too often', 'This was asked for too often. Wait a minute, then try again.', {
-        headers: { 'Retry-After': String(windowMs / 1000) },
-      });
+      throw new Problem(
+        429,
+        'Too often',
+        'This was asked for too often. Wait a minute, then try again.',
+        {
+          headers: { 'Retry-After': String(windowMs / 1000) },
+        },
+      );
     },
   });
 }

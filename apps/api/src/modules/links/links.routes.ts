@@ -17,7 +17,10 @@ export function linkRoutes(context: Context): Router {
 
   serve(router, context, agreeOffer, async (work, { params, body }) => {
     const quoteId = await quoteIdBehind(work, params.token);
-    const byCustomer = { ...work, actor: { id: null, name: 'The customer', role: 'customer' as const } };
+    const byCustomer = {
+      ...work,
+      actor: { id: null, name: 'The customer', role: 'customer' as const },
+    };
     await agreeQuote(byCustomer, { quoteId, quantity: body.quantity, how: 'link' });
     return offerOf(work, quoteId);
   });

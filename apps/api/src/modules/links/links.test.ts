@@ -1,6 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { lapseQuotes } from '../../flows/lapse-quotes.ts';
-import { draftQuote, readyToQuote, sendByHand, type QuotingShop } from '../../testing/example-quote.ts';
+import {
+  draftQuote,
+  readyToQuote,
+  sendByHand,
+  type QuotingShop,
+} from '../../testing/example-quote.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { inTransaction, theProgram } from '../../work.ts';
 import { Activity } from '../activity/activity.entity.ts';
@@ -19,7 +24,8 @@ afterAll(() => shop.close());
 
 const sent = async (change: object = {}) => sendByHand(ready, await draftQuote(ready, change));
 const open = (token: string) => shop.nobody().get(`/api/links/${token}`);
-const agree = (token: string, body: object) => shop.nobody().post(`/api/links/${token}/agreements`).send(body);
+const agree = (token: string, body: object) =>
+  shop.nobody().post(`/api/links/${token}/agreements`).send(body);
 
 async function at<T>(instant: string, act: () => Promise<T>): Promise<T> {
   shop.clock.set(new Date(instant));
@@ -46,7 +52,12 @@ describe('a customer’s link', () => {
       toolingTotal: '60.00',
       agreedQuantity: null,
     });
-    expect(Object.keys(body.breaks[0]).sort()).toEqual(['goodsTotal', 'priceEach', 'quantity', 'total']);
+    expect(Object.keys(body.breaks[0]).sort()).toEqual([
+      'goodsTotal',
+      'priceEach',
+      'quantity',
+      'total',
+    ]);
     const text = JSON.stringify(body);
     for (const hidden of ['cost', 'margin', 'PerHour', 'wage', '48.00', '9.50', 'example.com']) {
       expect(text).not.toContain(hidden);
@@ -60,7 +71,9 @@ describe('a customer’s link', () => {
     const links = await em.find(CustomerLink, { id: { $gt: 0 } });
     expect(links.every(({ tokenHash }) => /^[0-9a-f]{64}$/.test(tokenHash))).toBe(true);
     expect(JSON.stringify(links)).not.toContain(token);
-    expect(JSON.stringify(await em.find(IdempotentReply, { status: { $gt: 0 } }))).not.toContain(token);
+    expect(JSON.stringify(await em.find(IdempotentReply, { status: { $gt: 0 } }))).not.toContain(
+      token,
+    );
     expect(JSON.stringify(await em.find(Activity, { seq: { $gt: 0 } }))).not.toContain(token);
   });
 
@@ -82,7 +95,9 @@ describe('a customer’s link', () => {
     expect((await open(token).expect(200)).body).toEqual(agreed);
     const seen = (await shop.as('owner').get(`/api/quotes/${quote.id}`)).body;
     expect(seen).toMatchObject({ state: 'agreed', agreedQuantity: 100, agreedHow: 'link' });
-    const deeds = await shop.context.orm.em.fork().find(Activity, { action: `agreed to quote ${quote.number}` });
+    const deeds = await shop.context.orm.em
+      .fork()
+      .find(Activity, { action: `agreed to quote ${quote.number}` });
     expect(deeds).toMatchObject([{ actorRole: 'customer', actorId: null }]);
   });
 
@@ -97,8 +112,14 @@ describe('a customer’s link', () => {
 
   it('is noted as the customer’s even in a browser where the owner is signed in', async () => {
     const { token, quote } = await sent();
-    await shop.as('owner').post(`/api/links/${token}/agreements`).send({ quantity: 50 }).expect(200);
-    const deeds = await shop.context.orm.em.fork().find(Activity, { action: `agreed to quote ${quote.number}` });
+    await shop
+      .as('owner')
+      .post(`/api/links/${token}/agreements`)
+      .send({ quantity: 50 })
+      .expect(200);
+    const deeds = await shop.context.orm.em
+      .fork()
+      .find(Activity, { action: `agreed to quote ${quote.number}` });
     expect(deeds).toMatchObject([{ actorRole: 'customer' }]);
   });
 });
@@ -112,7 +133,8 @@ describe('a link that does not work', () => {
     expect((await open('x').expect(404)).body.detail).toBe(sentence);
     const late = '2027-03-20T00:00:00.000Z';
     expect((await at(late, () => open(token).expect(404))).body.detail).toBe(sentence);
-    const stopped = (await shop.as('owner').delete(`/api/quotes/${quote.id}/links`).expect(200)).body;
+    const stopped = (await shop.as('owner').delete(`/api/quotes/${quote.id}/links`).expect(200))
+      .body;
     expect(stopped.link).toBeNull();
     expect((await open(token).expect(404)).body.detail).toBe(sentence);
     await agree(token, { quantity: 100 }).expect(404);
@@ -120,7 +142,8 @@ describe('a link that does not work', () => {
 
   it('is the one of a quote that was replaced', async () => {
     const { token, quote } = await sent();
-    const draft = (await shop.as('owner').post(`/api/quotes/${quote.id}/revisions`).expect(201)).body;
+    const draft = (await shop.as('owner').post(`/api/quotes/${quote.id}/revisions`).expect(201))
+      .body;
     await open(token).expect(200);
     const next = await sendByHand(ready, draft);
     await open(token).expect(404);
@@ -129,7 +152,11 @@ describe('a link that does not work', () => {
 
   it('can be followed by another, and the first one works beside it', async () => {
     const { token, quote } = await sent();
-    const again = await shop.as('owner').post(`/api/quotes/${quote.id}/links`).send({ by: 'hand' }).expect(200);
+    const again = await shop
+      .as('owner')
+      .post(`/api/quotes/${quote.id}/links`)
+      .send({ by: 'hand' })
+      .expect(200);
     await open(String(again.body.linkUrl).split('/c/')[1] ?? '').expect(200);
     await open(token).expect(200);
     const draft = await draftQuote(ready);
@@ -154,7 +181,9 @@ describe('an offer that has run out', () => {
       await inTransaction(shop.context, theProgram, lapseQuotes);
     });
     expect((await shop.as('owner').get(`/api/quotes/${quote.id}`)).body.state).toBe('lapsed');
-    const deeds = await shop.context.orm.em.fork().find(Activity, { action: `let quote ${quote.number} lapse` });
+    const deeds = await shop.context.orm.em
+      .fork()
+      .find(Activity, { action: `let quote ${quote.number} lapse` });
     expect(deeds).toHaveLength(1);
   });
 
@@ -169,7 +198,8 @@ describe('an offer that has run out', () => {
 describe('whoever tries too often', () => {
   it('[S16] is asked to wait', async () => {
     const statuses: number[] = [];
-    for (let tried = 0; tried < 80; tried += 1) statuses.push((await open(`guess-${tried}`)).status);
+    for (let tried = 0; tried < 80; tried += 1)
+      statuses.push((await open(`guess-${tried}`)).status);
     expect(statuses.at(-1)).toBe(429);
     const { body, headers } = await open('another').expect(429);
     expect(headers['retry-after']).toBe('60');

@@ -13,7 +13,11 @@ import { quoteBehind } from './customer-links.ts';
 
 /** The same words for a token that never was, has expired or was stopped. */
 const noOffer = () =>
-  new Problem(404, 'Not found', 'This link does not work, or no longer works. Ask the shop for a new one.');
+  new Problem(
+    404,
+    'Not found',
+    'This link does not work, or no longer works. Ask the shop for a new one.',
+  );
 
 /** @throws {Problem} 404 when the token opens nothing */
 export async function quoteIdBehind(work: Work, token: string): Promise<number> {
@@ -40,7 +44,12 @@ export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
     message: quote.message,
     outline: outlineOf(await work.em.findOneOrFail(StoredLayout, quote.layoutId)),
     currency: workshop.currency,
-    breaks: breaks.map(({ quantity, priceEach, goodsTotal, total }) => ({ quantity, priceEach, goodsTotal, total })),
+    breaks: breaks.map(({ quantity, priceEach, goodsTotal, total }) => ({
+      quantity,
+      priceEach,
+      goodsTotal,
+      total,
+    })),
     tooling,
     toolingTotal,
     agreedQuantity: quote.agreedQuantity,

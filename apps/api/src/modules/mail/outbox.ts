@@ -38,7 +38,11 @@ export async function leaseMail(work: Work): Promise<OutgoingMail | null> {
   const at = work.now.toISOString();
   const mail = await work.em.findOne(
     OutgoingMail,
-    { state: 'waiting', nextTryAt: { $lte: at }, $or: [{ leaseUntil: null }, { leaseUntil: { $lte: at } }] },
+    {
+      state: 'waiting',
+      nextTryAt: { $lte: at },
+      $or: [{ leaseUntil: null }, { leaseUntil: { $lte: at } }],
+    },
     { orderBy: { nextTryAt: 'asc', id: 'asc' } },
   );
   if (mail === null) return null;
@@ -51,10 +55,19 @@ export async function leaseMail(work: Work): Promise<OutgoingMail | null> {
 /** Notes that a mail has left; the words it carried are no longer needed, and may hold a customer's link. */
 export async function markSent(work: Work, id: number): Promise<void> {
   const mail = await work.em.findOneOrFail(OutgoingMail, id);
-  Object.assign(mail, { state: 'sent', sentAt: work.now.toISOString(), leaseUntil: null, lastError: null });
+  Object.assign(mail, {
+    state: 'sent',
+    sentAt: work.now.toISOString(),
+    leaseUntil: null,
+    lastError: null,
+  });
   mail.body = withoutToken(mail.body);
   await work.em.flush();
-  await logDeed(work, { action: `mailed “${mail.subject}”`, subjectKind: 'mail', subjectId: mail.id });
+  await logDeed(work, {
+    action: `mailed “${mail.subject}”`,
+    subjectKind: 'mail',
+    subjectId: mail.id,
+  });
 }
 
 /** Notes that a try failed: the next one comes later each time, and after the last the mail is given up. */
@@ -62,7 +75,9 @@ export async function markFailed(work: Work, id: number, why: string): Promise<v
   const mail = await work.em.findOneOrFail(OutgoingMail, id);
   mail.leaseUntil = null;
   mail.lastError = why.slice(0, 300);
-  mail.nextTryAt = new Date(work.now.getTime() + firstWaitMs * 2 ** (mail.attempts - 1)).toISOString();
+  mail.nextTryAt = new Date(
+    work.now.getTime() + firstWaitMs * 2 ** (mail.attempts - 1),
+  ).toISOString();
   if (mail.attempts < mostAttempts) {
     await work.em.flush();
     return;
@@ -70,12 +85,24 @@ export async function markFailed(work: Work, id: number, why: string): Promise<v
   mail.state = 'failed';
   mail.body = withoutToken(mail.body);
   await work.em.flush();
-  await logDeed(work, { action: `gave up mailing “${mail.subject}”`, subjectKind: 'mail', subjectId: mail.id });
+  await logDeed(work, {
+    action: `gave up mailing “${mail.subject}”`,
+    subjectKind: 'mail',
+    subjectId: mail.id,
+  });
 }
 
 /** The subject's latest mail, which tells whether it has left. */
-export async function latestMail(work: Work, kind: NewMail['subjectKind'], id: number): Promise<OutgoingMail | null> {
-  return work.em.findOne(OutgoingMail, { subjectKind: kind, subjectId: id }, { orderBy: { id: 'desc' } });
+export async function latestMail(
+  work: Work,
+  kind: NewMail['subjectKind'],
+  id: number,
+): Promise<OutgoingMail | null> {
+  return work.em.findOne(
+    OutgoingMail,
+    { subjectKind: kind, subjectId: id },
+    { orderBy: { id: 'desc' } },
+  );
 }
 
 const withoutToken = (body: string) => body.replaceAll(/\/c\/[A-Za-z0-9_-]+/g, '/c/…');

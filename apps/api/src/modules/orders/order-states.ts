@@ -11,7 +11,8 @@ export function stateAwaiting(awaits: readonly Awaited[]): OrderState {
 export const isAwaiting = (state: OrderState): boolean => state.startsWith('awaiting');
 
 /** In the order in which they are usually had. */
-export const sortAwaits = (awaits: readonly Awaited[]): Awaited[] => inOrder.filter((what) => awaits.includes(what));
+export const sortAwaits = (awaits: readonly Awaited[]): Awaited[] =>
+  inOrder.filter((what) => awaits.includes(what));
 
 const nextSteps: Record<OrderState, string[]> = {
   'awaiting proof': ['note what has arrived'],

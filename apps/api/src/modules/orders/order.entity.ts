@@ -39,7 +39,17 @@ export class Order {
   total!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })
-  state!: 'awaiting proof' | 'awaiting deposit' | 'awaiting tooling' | 'taken on' | 'in work' | 'packed' | 'part shipped' | 'shipped' | 'closed' | 'cancelled';
+  state!:
+    | 'awaiting proof'
+    | 'awaiting deposit'
+    | 'awaiting tooling'
+    | 'taken on'
+    | 'in work'
+    | 'packed'
+    | 'part shipped'
+    | 'shipped'
+    | 'closed'
+    | 'cancelled';
 
   @Property({ type: JsonText, columnType: 'text' })
   awaits!: ('proof' | 'deposit' | 'tooling')[];

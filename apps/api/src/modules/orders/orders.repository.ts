@@ -74,7 +74,14 @@ export async function findOrders(em: EntityManager, filter: OrderFilter): Promis
   if (filter.customerId !== undefined) where('o.customer_id = ?', filter.customerId);
   if (filter.q !== undefined) {
     const like = `%${filter.q}%`;
-    where('(o.number LIKE ? OR o.title LIKE ? OR c.name LIKE ? OR j.number LIKE ? OR q.number LIKE ?)', like, like, like, like, like);
+    where(
+      '(o.number LIKE ? OR o.title LIKE ? OR c.name LIKE ? OR j.number LIKE ? OR q.number LIKE ?)',
+      like,
+      like,
+      like,
+      like,
+      like,
+    );
   }
   const sql = `${joined} ${conditions.length > 0 ? `WHERE ${conditions.join(' AND ')}` : ''} ORDER BY o.id DESC LIMIT ?`;
   const rows = await em.execute<OrderRow[]>(sql, [...values, filter.limit + 1]);

@@ -1,5 +1,12 @@
 import { Router } from 'express';
-import { checkQuote, listOrders, readOrder, recordArrival, shipOrder, takeOnOrder } from '@hidewright/contract';
+import {
+  checkQuote,
+  listOrders,
+  readOrder,
+  recordArrival,
+  shipOrder,
+  takeOnOrder,
+} from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { checkQuotedRun } from '../../flows/check-run.ts';
 import { noteArrival } from '../../flows/note-arrival.ts';
@@ -19,7 +26,14 @@ export function orderRoutes(context: Context): Router {
   serve(router, context, listOrders, async ({ em }, { query }) => {
     const { limit, q, state, customerId } = query;
     const open = query.open === undefined ? undefined : query.open === 'true';
-    const rows = await findOrders(em, { below: readCursor(query.cursor), limit, q, state, open, customerId });
+    const rows = await findOrders(em, {
+      below: readCursor(query.cursor),
+      limit,
+      q,
+      state,
+      open,
+      customerId,
+    });
     return toPage(rows, limit, (row) => row.id);
   });
 

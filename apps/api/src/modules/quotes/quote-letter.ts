@@ -2,11 +2,17 @@ import type { QuotePaper } from '../../papers/quote-pdf.ts';
 import { sayDay } from './say-day.ts';
 
 /** The words that go with a quote, by mail or copied by hand. */
-export function quoteLetter(paper: QuotePaper, linkUrl: string, addressee: string): { subject: string; text: string } {
+export function quoteLetter(
+  paper: QuotePaper,
+  linkUrl: string,
+  addressee: string,
+): { subject: string; text: string } {
   const paragraphs = [
     `Good day ${addressee},`,
     `here is our quote ${paper.number} for ${paper.title}${inHands(paper.inHandsOn)}:`,
-    paper.breaks.map((rung) => `  ${rung.quantity} at ${rung.priceEach} each: ${rung.goodsTotal}`).join('\n'),
+    paper.breaks
+      .map((rung) => `  ${rung.quantity} at ${rung.priceEach} each: ${rung.goodsTotal}`)
+      .join('\n'),
     paper.tooling.map((tool) => `${tool.name}, charged once: ${tool.charge}`).join('\n'),
     `Prices in ${paper.currency}. Sales tax, where it applies, is added on the invoice.`,
     paper.message,

@@ -21,7 +21,8 @@ export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
     title: quote.title,
     day: quote.sentAt === null ? work.today : dayOf(quote.sentAt, workshop.timeZone),
     inHandsOn: quote.inHandsOn,
-    validUntil: quote.validUntil ?? lastGoodDay(work.today, workshop.quoteValidDays, quote.inHandsOn),
+    validUntil:
+      quote.validUntil ?? lastGoodDay(work.today, workshop.quoteValidDays, quote.inHandsOn),
     message: quote.message,
     currency: workshop.currency,
     outlinePath: pathOf(await work.em.findOneOrFail(StoredLayout, quote.layoutId)),
@@ -33,6 +34,8 @@ export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
 
 /** An offer runs out after the shop's usual time, or on the day the goods are needed where that comes first. */
 export function lastGoodDay(today: string, validDays: number, inHandsOn: string | null): string {
-  const usual = new Date(Date.parse(`${today}T00:00:00Z`) + validDays * 24 * 60 * 60_000).toISOString().slice(0, 10);
+  const usual = new Date(Date.parse(`${today}T00:00:00Z`) + validDays * 24 * 60 * 60_000)
+    .toISOString()
+    .slice(0, 10);
   return inHandsOn !== null && inHandsOn < usual ? inHandsOn : usual;
 }

@@ -17,7 +17,11 @@ import { quotedOf } from './quoted.ts';
  * A quote with all that its screen shows.
  * @param mailAvailable whether a mail server is set
  */
-export async function quoteReply(work: Work, quote: Quote, mailAvailable: boolean): Promise<QuoteReply> {
+export async function quoteReply(
+  work: Work,
+  quote: Quote,
+  mailAvailable: boolean,
+): Promise<QuoteReply> {
   const customer = await work.em.findOneOrFail(Customer, quote.customerId);
   const version = await work.em.findOneOrFail(PatternVersion, quote.patternVersionId);
   const pattern = await work.em.findOneOrFail(Pattern, version.patternId);

@@ -7,15 +7,31 @@ import type { Quote } from './quote.entity.ts';
 
 /** What a quote offers, at what price: all that its customer gets to see of its numbers. */
 export interface Quoted {
-  breaks: { quantity: number; typedPrice: string | null; priceEach: string; goodsTotal: string; total: string }[];
+  breaks: {
+    quantity: number;
+    typedPrice: string | null;
+    priceEach: string;
+    goodsTotal: string;
+    total: string;
+  }[];
   tooling: { name: string; charge: string }[];
   toolingTotal: string;
 }
 
-export async function quotedOf(work: Pick<Work, 'em'>, quote: Pick<Quote, 'id' | 'input'>): Promise<Quoted> {
-  const rungs = await work.em.find(QuoteBreak, { quoteId: quote.id }, { orderBy: { quantity: 'asc' } });
+export async function quotedOf(
+  work: Pick<Work, 'em'>,
+  quote: Pick<Quote, 'id' | 'input'>,
+): Promise<Quoted> {
+  const rungs = await work.em.find(
+    QuoteBreak,
+    { quoteId: quote.id },
+    { orderBy: { quantity: 'asc' } },
+  );
   const input = quote.input as RunInput;
-  const toolingTotal = sumMoney(input.tooling.map((tool) => tool.charge), 2);
+  const toolingTotal = sumMoney(
+    input.tooling.map((tool) => tool.charge),
+    2,
+  );
   return {
     breaks: rungs.map((rung) => ({
       quantity: rung.quantity,
@@ -24,7 +40,10 @@ export async function quotedOf(work: Pick<Work, 'em'>, quote: Pick<Quote, 'id' |
       goodsTotal: moneyText(rung.total.minus(toolingTotal)),
       total: moneyText(rung.total),
     })),
-    tooling: input.tooling.map(({ name, charge }) => ({ name, charge: moneyText(new Decimal(charge)) })),
+    tooling: input.tooling.map(({ name, charge }) => ({
+      name,
+      charge: moneyText(new Decimal(charge)),
+    })),
     toolingTotal,
   };
 }

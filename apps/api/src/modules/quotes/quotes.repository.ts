@@ -49,7 +49,10 @@ const chosen = `
   LEFT JOIN customer_order o ON o.quote_id = q.id`;
 
 /** A page of quotes, newest first, with the names that a list shows. */
-export async function listQuoteRows(work: Work, asked: Asked): Promise<{ items: QuoteRow[]; next: string | null }> {
+export async function listQuoteRows(
+  work: Work,
+  asked: Asked,
+): Promise<{ items: QuoteRow[]; next: string | null }> {
   const { where, values } = conditions(asked);
   const sql = `${chosen} ${where} ORDER BY q.id DESC LIMIT ?`;
   const rows = await work.em
@@ -67,10 +70,16 @@ function conditions(asked: Asked): { where: string; values: (string | number)[] 
   if (asked.customerId !== undefined) parts.push(['q.customer_id = ?', [asked.customerId]]);
   if (asked.q !== undefined && asked.q !== '') {
     const like = `%${asked.q}%`;
-    parts.push(['(q.number LIKE ? OR q.title LIKE ? OR c.name LIKE ? OR p.name LIKE ?)', [like, like, like, like]]);
+    parts.push([
+      '(q.number LIKE ? OR q.title LIKE ? OR c.name LIKE ? OR p.name LIKE ?)',
+      [like, like, like, like],
+    ]);
   }
   if (parts.length === 0) return { where: '', values: [] };
-  return { where: `WHERE ${parts.map(([sql]) => sql).join(' AND ')}`, values: parts.flatMap(([, values]) => values) };
+  return {
+    where: `WHERE ${parts.map(([sql]) => sql).join(' AND ')}`,
+    values: parts.flatMap(([, values]) => values),
+  };
 }
 
 function toRow(row: Found): QuoteRow {

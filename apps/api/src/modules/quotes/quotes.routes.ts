@@ -44,11 +44,17 @@ export function quoteRoutes(context: Context): Router {
     linkUrl,
     text,
   });
-  const way = (by: Way['by'], origin: string): Way => ({ by, origin: context.config.publicUrl ?? origin, mailAvailable });
+  const way = (by: Way['by'], origin: string): Way => ({
+    by,
+    origin: context.config.publicUrl ?? origin,
+    mailAvailable,
+  });
 
   serve(router, context, listQuotes, async (work, { query }) => listQuoteRows(work, query));
 
-  serve(router, context, readQuote, async (work, { params }) => told(work, await findQuote(work, params.id)));
+  serve(router, context, readQuote, async (work, { params }) =>
+    told(work, await findQuote(work, params.id)),
+  );
 
   runBasisRoute(router, context);
 
@@ -111,7 +117,9 @@ export function quoteRoutes(context: Context): Router {
     told(work, await declineQuote(work, { quoteId: params.id, ...body })),
   );
 
-  serve(router, context, revision, async (work, { params }) => told(work, await reviseQuote(work, params.id)));
+  serve(router, context, revision, async (work, { params }) =>
+    told(work, await reviseQuote(work, params.id)),
+  );
 
   serveFile(router, context, quotePaper, async (work, { params }) => {
     const paper = await paperOf(work, await findQuote(work, params.id));

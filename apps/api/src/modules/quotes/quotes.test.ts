@@ -1,7 +1,13 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { priceRun, type RunInput } from '@hidewright/domain';
 import type { Quote as QuoteReply } from '@hidewright/contract';
-import { draftQuote, quoteBody, readyToQuote, sendByHand, type QuotingShop } from '../../testing/example-quote.ts';
+import {
+  draftQuote,
+  quoteBody,
+  readyToQuote,
+  sendByHand,
+  type QuotingShop,
+} from '../../testing/example-quote.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { Activity } from '../activity/activity.entity.ts';
 import { Quote } from './quote.entity.ts';
@@ -66,10 +72,24 @@ describe('a draft', () => {
   it('takes the price that the owner types, and gives the worked-out one back', async () => {
     const plain = await draftQuote(ready, { breaks: [{ quantity: 100 }] });
     const suggested = plain.breaks[0]?.priceEach;
-    const typed = (await change(plain, quoteBody(ready, { breaks: [{ quantity: 100, typedPrice: '9.1234' }] })).expect(200)).body;
-    expect(typed.breaks[0]).toMatchObject({ typedPrice: '9.1234', priceEach: '9.1234', goodsTotal: '912.34' });
-    expect(typed.numbers.breaks[0]).toMatchObject({ typed: true, suggestedPrice: Number(suggested).toString() });
-    const restored = (await change(typed, quoteBody(ready, { breaks: [{ quantity: 100 }] })).expect(200)).body;
+    const typed = (
+      await change(
+        plain,
+        quoteBody(ready, { breaks: [{ quantity: 100, typedPrice: '9.1234' }] }),
+      ).expect(200)
+    ).body;
+    expect(typed.breaks[0]).toMatchObject({
+      typedPrice: '9.1234',
+      priceEach: '9.1234',
+      goodsTotal: '912.34',
+    });
+    expect(typed.numbers.breaks[0]).toMatchObject({
+      typed: true,
+      suggestedPrice: Number(suggested).toString(),
+    });
+    const restored = (
+      await change(typed, quoteBody(ready, { breaks: [{ quantity: 100 }] })).expect(200)
+    ).body;
     expect(restored.breaks[0]).toMatchObject({ typedPrice: null, priceEach: suggested });
   });
 
@@ -81,7 +101,9 @@ describe('a draft', () => {
       .set('If-Match', `"${leather.version}"`)
       .send({ pricePerFt2: '19' })
       .expect(200);
-    expect((await owner().get(`/api/quotes/${quote.id}`)).body.input.leather.pricePerFt2).toBe('9.50');
+    expect((await owner().get(`/api/quotes/${quote.id}`)).body.input.leather.pricePerFt2).toBe(
+      '9.50',
+    );
     const saved = (await change(quote, quoteBody(ready)).expect(200)).body;
     expect(saved.input.leather.pricePerFt2).toBe('19.00');
     expect(Number(saved.breaks[0].priceEach)).toBeGreaterThan(Number(quote.breaks[0]?.priceEach));
@@ -96,7 +118,10 @@ describe('a draft', () => {
     const overrides = { rejectPercent: '25', leatherPricePerFt2: '12' };
     const quote = await draftQuote(ready, { overrides });
     expect(quote.overrides).toEqual(overrides);
-    expect(quote.input).toMatchObject({ leather: { pricePerFt2: '12' }, work: { rejectPercent: '25' } });
+    expect(quote.input).toMatchObject({
+      leather: { pricePerFt2: '12' },
+      work: { rejectPercent: '25' },
+    });
     const plain = await draftQuote(ready);
     const cut = (each: QuoteReply) => each.numbers?.breaks[0]?.cutCount ?? 0;
     expect(cut(quote)).toBeGreaterThan(cut(plain));
@@ -107,7 +132,8 @@ describe('a draft', () => {
   });
 
   it('is made once for one Idempotency-Key', async () => {
-    const send = () => owner().post('/api/quotes').set('Idempotency-Key', 'once').send(quoteBody(ready));
+    const send = () =>
+      owner().post('/api/quotes').set('Idempotency-Key', 'once').send(quoteBody(ready));
     const first = (await send().expect(201)).body;
     expect((await send().expect(201)).body).toEqual(first);
   });
@@ -117,21 +143,49 @@ describe('a draft that makes no sense', () => {
   it.each([
     ['a quantity twice', { breaks: [{ quantity: 50 }, { quantity: 50 }] }, 'breaks.1.quantity'],
     ['no quantity', { breaks: [] }, 'breaks'],
-    ['nine quantities', { breaks: [1, 2, 3, 4, 5, 6, 7, 8, 9].map((quantity) => ({ quantity })) }, 'breaks'],
+    [
+      'nine quantities',
+      { breaks: [1, 2, 3, 4, 5, 6, 7, 8, 9].map((quantity) => ({ quantity })) },
+      'breaks',
+    ],
     ['a negative quantity', { breaks: [{ quantity: -5 }] }, 'breaks.0.quantity'],
     ['half a piece', { breaks: [{ quantity: 1.5 }] }, 'breaks.0.quantity'],
-    ['a price that is no number', { breaks: [{ quantity: 5, typedPrice: 'NaN' }] }, 'breaks.0.typedPrice'],
+    [
+      'a price that is no number',
+      { breaks: [{ quantity: 5, typedPrice: 'NaN' }] },
+      'breaks.0.typedPrice',
+    ],
     ['a negative price', { breaks: [{ quantity: 5, typedPrice: '-1' }] }, 'breaks.0.typedPrice'],
-    ['too many decimals', { breaks: [{ quantity: 5, typedPrice: '1.00001' }] }, 'breaks.0.typedPrice'],
+    [
+      'too many decimals',
+      { breaks: [{ quantity: 5, typedPrice: '1.00001' }] },
+      'breaks.0.typedPrice',
+    ],
     ['an unknown field', { total: '1.00' }, 'total'],
-    ['an unknown field in a rung', { breaks: [{ quantity: 5, priceEach: '1' }] }, 'breaks.0.priceEach'],
+    [
+      'an unknown field in a rung',
+      { breaks: [{ quantity: 5, priceEach: '1' }] },
+      'breaks.0.priceEach',
+    ],
     ['a day that does not exist', { inHandsOn: '2026-02-30' }, 'inHandsOn'],
     ['a day that is over', { inHandsOn: '2026-11-30' }, 'inHandsOn'],
     ['a customer who does not exist', { customerId: 9999 }, 'customerId'],
     ['a pattern that does not exist', { patternId: 9999 }, 'patternId'],
-    ['tooling without a name', { tooling: [{ name: '', cost: '1', charge: '1' }] }, 'tooling.0.name'],
-    ['tooling in fractions of a cent', { tooling: [{ name: 'Die', cost: '1.005', charge: '1' }] }, 'tooling.0.cost'],
-    ['rejects of more than all', { overrides: { rejectPercent: '101' } }, 'overrides.rejectPercent'],
+    [
+      'tooling without a name',
+      { tooling: [{ name: '', cost: '1', charge: '1' }] },
+      'tooling.0.name',
+    ],
+    [
+      'tooling in fractions of a cent',
+      { tooling: [{ name: 'Die', cost: '1.005', charge: '1' }] },
+      'tooling.0.cost',
+    ],
+    [
+      'rejects of more than all',
+      { overrides: { rejectPercent: '101' } },
+      'overrides.rejectPercent',
+    ],
   ])('is refused: %s', async (_name, wrong, field) => {
     const before = await shop.context.orm.em.fork().count(Quote);
     const { body } = await owner().post('/api/quotes').send(quoteBody(ready, wrong)).expect(422);
@@ -151,7 +205,10 @@ describe('a draft that makes no sense', () => {
     const quote = await draftQuote(ready);
     await change(quote, quoteBody(ready, { title: 'Coasters, renamed' })).expect(200);
     const { body } = await change(quote, quoteBody(ready)).expect(412);
-    expect(body.changed).toMatchObject({ by: 'The owner', what: `worked out quote ${quote.number} again` });
+    expect(body.changed).toMatchObject({
+      by: 'The owner',
+      what: `worked out quote ${quote.number} again`,
+    });
     await owner().put(`/api/quotes/${quote.id}`).send(quoteBody(ready)).expect(428);
   });
 });
@@ -160,7 +217,11 @@ describe('a quote that was sent', () => {
   it('never changes again, whatever changes around it', async () => {
     const draft = await draftQuote(ready);
     const { quote } = await sendByHand(ready, draft);
-    expect(quote).toMatchObject({ state: 'sent', validUntil: '2026-12-18', sentAt: '2026-12-01T09:00:00.000Z' });
+    expect(quote).toMatchObject({
+      state: 'sent',
+      validUntil: '2026-12-18',
+      sentAt: '2026-12-01T09:00:00.000Z',
+    });
     const refused = await change(quote, quoteBody(ready)).expect(409);
     expect(refused.body).toMatchObject({
       detail: `Quote ${quote.number} has been sent, and stays as it was sent. Make a revision to change it.`,
@@ -175,7 +236,10 @@ describe('a quote that was sent', () => {
     const draft = await draftQuote(ready);
     const { quote } = await sendByHand(ready, draft);
     const send = (version: number) =>
-      owner().post(`/api/quotes/${quote.id}/sendings`).set('If-Match', `"${version}"`).send({ by: 'hand' });
+      owner()
+        .post(`/api/quotes/${quote.id}/sendings`)
+        .set('If-Match', `"${version}"`)
+        .send({ by: 'hand' });
     await send(draft.version).expect(412);
     await send(quote.version).expect(409);
     await post(quote, 'sendings', { by: 'hand' }).expect(428);
@@ -189,7 +253,10 @@ describe('a quote that was sent', () => {
       .send({ by: 'mail' })
       .expect(422);
     expect(body.errors).toEqual([
-      { field: 'by', message: 'No mail server is set, so send it by hand: copy the link and the text.' },
+      {
+        field: 'by',
+        message: 'No mail server is set, so send it by hand: copy the link and the text.',
+      },
     ]);
     expect((await owner().get(`/api/quotes/${draft.id}`)).body.state).toBe('draft');
     const { text, linkUrl } = await sendByHand(ready, draft);
@@ -201,7 +268,10 @@ describe('a quote that was sent', () => {
 
   it('is on paper as a PDF that holds no cost', async () => {
     const draft = await draftQuote(ready);
-    const reply = await owner().get(`/api/quotes/${draft.id}/paper`).responseType('blob').expect(200);
+    const reply = await owner()
+      .get(`/api/quotes/${draft.id}/paper`)
+      .responseType('blob')
+      .expect(200);
     expect(reply.headers['content-type']).toBe('application/pdf');
     expect(reply.headers['content-disposition']).toContain(`${draft.number}.pdf`);
     expect((reply.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
@@ -210,7 +280,12 @@ describe('a quote that was sent', () => {
   it('gives way to its revision once that is sent', async () => {
     const first = (await sendByHand(ready, await draftQuote(ready))).quote;
     const draft = (await post(first, 'revisions').expect(201)).body as QuoteReply;
-    expect(draft).toMatchObject({ number: first.number, revision: 2, state: 'draft', breaks: first.breaks });
+    expect(draft).toMatchObject({
+      number: first.number,
+      revision: 2,
+      state: 'draft',
+      breaks: first.breaks,
+    });
     await post(first, 'revisions').expect(409);
     expect((await owner().get(`/api/quotes/${first.id}`)).body.state).toBe('sent');
     const cheaper = quoteBody(ready, { breaks: [{ quantity: 100, typedPrice: '3.00' }] });
@@ -242,9 +317,11 @@ describe('a quote that was sent', () => {
 describe('an agreement by phone', () => {
   it('is one press, also from a draft, and is noted once', async () => {
     const draft = await draftQuote(ready);
-    const agreed = (await post(draft, 'agreements', { quantity: 100, how: 'phone' }).expect(200)).body;
+    const agreed = (await post(draft, 'agreements', { quantity: 100, how: 'phone' }).expect(200))
+      .body;
     expect(agreed).toMatchObject({ state: 'agreed', agreedQuantity: 100, agreedHow: 'phone' });
-    const again = (await post(draft, 'agreements', { quantity: 100, how: 'phone' }).expect(200)).body;
+    const again = (await post(draft, 'agreements', { quantity: 100, how: 'phone' }).expect(200))
+      .body;
     expect(again).toEqual(agreed);
     const { body } = await post(draft, 'agreements', { quantity: 250, how: 'phone' }).expect(409);
     expect(body.allowed).toEqual(['share', 'take on']);
@@ -261,7 +338,8 @@ describe('an agreement by phone', () => {
 
   it('does not follow a refusal', async () => {
     const draft = await draftQuote(ready);
-    const declined = (await post(draft, 'refusals', { reason: 'too late for them' }).expect(200)).body;
+    const declined = (await post(draft, 'refusals', { reason: 'too late for them' }).expect(200))
+      .body;
     expect(declined.state).toBe('declined');
     const { body } = await post(draft, 'agreements', { quantity: 100, how: 'phone' }).expect(409);
     expect(body.allowed).toEqual(['revise']);
@@ -273,11 +351,23 @@ describe('what a role sees of a quote', () => {
   it('[S15] is no price, cost or address for the maker, who can still read what would be made', async () => {
     const draft = await draftQuote(ready);
     const seen = (await shop.as('maker').get(`/api/quotes/${draft.id}`).expect(200)).body;
-    expect(seen).toMatchObject({ number: draft.number, customerName: 'Brambling Brewery', inHandsOn: '2026-12-18' });
+    expect(seen).toMatchObject({
+      number: draft.number,
+      customerName: 'Brambling Brewery',
+      inHandsOn: '2026-12-18',
+    });
     expect(seen.breaks).toEqual([{ quantity: 50 }, { quantity: 100 }, { quantity: 250 }]);
     expect(seen.layout.pieces).toBe(draft.layout.pieces);
     const text = JSON.stringify(seen);
-    for (const hidden of ['example.com', 'priceEach', 'cost', 'charge', 'numbers', 'pricePerFt2', '60.00']) {
+    for (const hidden of [
+      'example.com',
+      'priceEach',
+      'cost',
+      'charge',
+      'numbers',
+      'pricePerFt2',
+      '60.00',
+    ]) {
       expect(text).not.toContain(hidden);
     }
     const list = (await shop.as('maker').get('/api/quotes').expect(200)).body;
@@ -300,9 +390,12 @@ describe('what a role sees of a quote', () => {
 describe('the list of quotes', () => {
   it('is found by number, customer, title and state, newest first, page by page', async () => {
     const draft = await draftQuote(ready, { title: 'A very particular thing' });
-    const get = async (query: object) => (await owner().get('/api/quotes').query(query).expect(200)).body;
+    const get = async (query: object) =>
+      (await owner().get('/api/quotes').query(query).expect(200)).body;
     const byTitle = await get({ q: 'particular' });
-    expect(byTitle.items).toMatchObject([{ id: draft.id, quantities: [50, 100, 250], total: draft.breaks[2]?.total }]);
+    expect(byTitle.items).toMatchObject([
+      { id: draft.id, quantities: [50, 100, 250], total: draft.breaks[2]?.total },
+    ]);
     expect((await get({ q: draft.number })).items).toHaveLength(1);
     expect((await get({ q: 'Brambling', limit: 1 })).items[0].id).toBe(draft.id);
     const agreed = (await get({ state: 'agreed' })).items as { state: string }[];
@@ -316,7 +409,8 @@ describe('the list of quotes', () => {
 
 describe('what a run is priced from', () => {
   it('gives the page the same numbers that a saved quote gets', async () => {
-    const basis = (await owner().get(`/api/patterns/${ready.patternId}/run-basis`).expect(200)).body;
+    const basis = (await owner().get(`/api/patterns/${ready.patternId}/run-basis`).expect(200))
+      .body;
     const quote = await draftQuote(ready);
     const { breaks, tooling } = quote.input as RunInput;
     expect(priceRun({ ...basis.input, breaks, tooling })).toEqual(quote.numbers);

@@ -9,7 +9,11 @@ export const benchRoutes: RouteObject[] = [
     children: [
       { index: true, lazy: () => import('./bench/index.tsx') },
       { path: 'jobs/:id', handle: { crumb: numberOf }, lazy: () => import('./bench/job.tsx') },
-      { path: 'checks/:id', handle: { crumb: 'Can we make it?' }, lazy: () => import('./bench/check.tsx') },
+      {
+        path: 'checks/:id',
+        handle: { crumb: 'Can we make it?' },
+        lazy: () => import('./bench/check.tsx'),
+      },
     ],
   },
 ];

@@ -16,7 +16,11 @@ export const counterRoutes: RouteObject[] = [
           { index: true, lazy: () => import('./counter/quotes.tsx') },
           { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-quote.tsx') },
           { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./counter/quote.tsx') },
-          { path: ':id/change', handle: { crumb: numberOf }, lazy: () => import('./counter/change-quote.tsx') },
+          {
+            path: ':id/change',
+            handle: { crumb: numberOf },
+            lazy: () => import('./counter/change-quote.tsx'),
+          },
         ],
       },
       {
@@ -32,7 +36,11 @@ export const counterRoutes: RouteObject[] = [
         handle: { crumb: 'Customers' },
         children: [
           { index: true, lazy: () => import('./counter/customers.tsx') },
-          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-customer.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            lazy: () => import('./counter/new-customer.tsx'),
+          },
           { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./counter/customer.tsx') },
         ],
       },

@@ -55,7 +55,10 @@ interface Answers {
 let sending = false;
 
 /** Sends what this person has waiting, first things first; stops where the workshop's computer cannot be reached. */
-export async function sendWaitingLogs(person: string, { onSent, onRefused }: Answers): Promise<void> {
+export async function sendWaitingLogs(
+  person: string,
+  { onSent, onRefused }: Answers,
+): Promise<void> {
   if (sending) return;
   sending = true;
   try {
@@ -67,10 +70,15 @@ export async function sendWaitingLogs(person: string, { onSent, onRefused }: Ans
   }
 }
 
-const nextOf = (person: string): WaitingLog | undefined => waiting.find((log) => log.person === person);
+const nextOf = (person: string): WaitingLog | undefined =>
+  waiting.find((log) => log.person === person);
 
 /** Whether there is any use in sending the next. */
-async function sendOne(log: WaitingLog, onSent: Answers['onSent'], onRefused: Answers['onRefused']): Promise<boolean> {
+async function sendOne(
+  log: WaitingLog,
+  onSent: Answers['onSent'],
+  onRefused: Answers['onRefused'],
+): Promise<boolean> {
   const { key, jobId, body } = log;
   try {
     const job = await call(logBench, { params: { id: jobId }, body, idempotencyKey: key });

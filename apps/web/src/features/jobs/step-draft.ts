@@ -11,7 +11,13 @@ export interface StepDraft {
   clockFrom: number | null;
 }
 
-export const emptyDraft: StepDraft = { good: 0, rejects: 0, seconds: 0, minutes: '', clockFrom: null };
+export const emptyDraft: StepDraft = {
+  good: 0,
+  rejects: 0,
+  seconds: 0,
+  minutes: '',
+  clockFrom: null,
+};
 
 /** Taps on a step: they survive a reload, and going to another step and back. */
 export function useStepDraft(stepId: number) {

@@ -3,7 +3,14 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect, useState, useSyncExternalStore } from 'react';
 import type { ApiProblem } from '../../lib/api-problem.ts';
 import { jobQuery } from './jobs.queries.ts';
-import { putLog, sendWaitingLogs, subscribe, waitingLogs, type LogBody, type WaitingLog } from './log-outbox.ts';
+import {
+  putLog,
+  sendWaitingLogs,
+  subscribe,
+  waitingLogs,
+  type LogBody,
+  type WaitingLog,
+} from './log-outbox.ts';
 
 export interface Refused {
   log: WaitingLog;

@@ -10,4 +10,5 @@ export function offerQuery(token: string) {
   });
 }
 
-export const useAgreeOffer = (token: string) => useSend(agreeOffer, { invalidates: [['offer', token]] });
+export const useAgreeOffer = (token: string) =>
+  useSend(agreeOffer, { invalidates: [['offer', token]] });

@@ -11,7 +11,10 @@ export function ordersQuery(wanted: Wanted = {}) {
   return infiniteQueryOptions({
     queryKey: ['orders', 'list', wanted],
     queryFn: ({ signal, pageParam }) =>
-      call(listOrders, { query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) }, signal }),
+      call(listOrders, {
+        query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
   });

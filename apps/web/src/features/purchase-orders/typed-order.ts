@@ -1,4 +1,4 @@
-import type { addPurchaseOrder} from '@hidewright/contract';
+import type { addPurchaseOrder } from '@hidewright/contract';
 import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { mm2ToFootage, round } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';

@@ -30,17 +30,30 @@ const numbersOf = (typed: TypedSoFar) => {
 describe('the preview of a quote', () => {
   it('is what the domain makes of the same input', () => {
     const typed = {
-      breaks: [{ quantity: 50, typedPrice: '4.20' }, { quantity: 250, typedPrice: null }],
+      breaks: [
+        { quantity: 50, typedPrice: '4.20' },
+        { quantity: 250, typedPrice: null },
+      ],
       tooling: [{ name: 'Stamp plate', cost: '48.00', charge: '60' }],
     };
     expect(numbersOf(typed)).toEqual(
-      priceRun({ ...input, breaks: typed.breaks, tooling: [{ name: 'Stamp plate', cost: '48.00', charge: '60' }] }),
+      priceRun({
+        ...input,
+        breaks: typed.breaks,
+        tooling: [{ name: 'Stamp plate', cost: '48.00', charge: '60' }],
+      }),
     );
   });
 
   it('leaves out what is only half typed', () => {
     const numbers = numbersOf({
-      breaks: [{ quantity: 50, typedPrice: '4.' }, { quantity: '' }, { quantity: -1 }, { quantity: 1.5 }, { quantity: 50 }],
+      breaks: [
+        { quantity: 50, typedPrice: '4.' },
+        { quantity: '' },
+        { quantity: -1 },
+        { quantity: 1.5 },
+        { quantity: 50 },
+      ],
       tooling: [{ name: '', cost: 'x', charge: undefined }],
     });
     expect(numbers.breaks.map(({ quantity, typed }) => [quantity, typed])).toEqual([[50, false]]);
@@ -57,8 +70,13 @@ describe('the preview of a quote', () => {
   });
 
   it('says why there are no numbers', () => {
-    expect(previewOf(basis, { breaks: [] })).toEqual({ why: 'Enter a quantity, and its price is worked out here.' });
-    const preview = previewOf(basis, { breaks: [{ quantity: 10 }], overrides: { rejectPercent: '100' } });
+    expect(previewOf(basis, { breaks: [] })).toEqual({
+      why: 'Enter a quantity, and its price is worked out here.',
+    });
+    const preview = previewOf(basis, {
+      breaks: [{ quantity: 10 }],
+      overrides: { rejectPercent: '100' },
+    });
     expect(preview).toMatchObject({ why: expect.stringContaining('nothing to sell') });
   });
 });

@@ -1,5 +1,12 @@
 import type { RunBasis } from '@hidewright/contract';
-import { DomainError, priceRun, type Break, type RunInput, type RunNumbers, type RunTooling } from '@hidewright/domain';
+import {
+  DomainError,
+  priceRun,
+  type Break,
+  type RunInput,
+  type RunNumbers,
+  type RunTooling,
+} from '@hidewright/domain';
 
 /** What stands in the form so far: anything may be missing or half typed. */
 export interface TypedSoFar {
@@ -16,7 +23,8 @@ export interface Preview {
 /** The numbers of what is typed so far, by the same function that prices the saved quote; or why there are none. */
 export function previewOf(basis: RunBasis, typed: TypedSoFar): Preview | { why: string } {
   const input = inputOf(basis.input, typed);
-  if (input.breaks.length === 0) return { why: 'Enter a quantity, and its price is worked out here.' };
+  if (input.breaks.length === 0)
+    return { why: 'Enter a quantity, and its price is worked out here.' };
   try {
     return { input, numbers: priceRun(input) };
   } catch (error) {
@@ -43,7 +51,9 @@ function rungsOf(typed: NonNullable<TypedSoFar['breaks']>): Break[] {
     if (!Number.isInteger(pieces) || pieces < 1 || pieces > 100_000) return [];
     return [{ quantity: pieces, typedPrice: figure(typedPrice) ?? null }];
   });
-  return rungs.filter((rung, at) => rungs.findIndex((each) => each.quantity === rung.quantity) === at);
+  return rungs.filter(
+    (rung, at) => rungs.findIndex((each) => each.quantity === rung.quantity) === at,
+  );
 }
 
 function toolOf(typed: NonNullable<TypedSoFar['tooling']>[number]): RunTooling[] {
@@ -52,10 +62,14 @@ function toolOf(typed: NonNullable<TypedSoFar['tooling']>[number]): RunTooling[]
 }
 
 function workOf(plan: RunInput['work'], rejects: string | undefined): RunInput['work'] {
-  return rejects === undefined || plan.kind === 'steps' ? plan : { ...plan, rejectPercent: rejects };
+  return rejects === undefined || plan.kind === 'steps'
+    ? plan
+    : { ...plan, rejectPercent: rejects };
 }
 
 /** A figure with at most four decimals, as text; undefined while it is none. */
 function figure(value: unknown): string | undefined {
-  return typeof value === 'string' && /^\d{1,9}(\.\d{1,4})?$/.test(value.trim()) ? value.trim() : undefined;
+  return typeof value === 'string' && /^\d{1,9}(\.\d{1,4})?$/.test(value.trim())
+    ? value.trim()
+    : undefined;
 }

@@ -1,4 +1,11 @@
-import { listPatterns, listQuotes, readQuote, readRunBasis, type Quote, type QuoteState } from '@hidewright/contract';
+import {
+  listPatterns,
+  listQuotes,
+  readQuote,
+  readRunBasis,
+  type Quote,
+  type QuoteState,
+} from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -12,7 +19,10 @@ export function quotesQuery(wanted: Wanted = {}) {
   return infiniteQueryOptions({
     queryKey: ['quotes', 'list', wanted],
     queryFn: ({ signal, pageParam }) =>
-      call(listQuotes, { query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) }, signal }),
+      call(listQuotes, {
+        query: { ...wanted, limit: 100, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
   });

@@ -19,7 +19,10 @@ export function Component() {
   const quantity = quote.agreedQuantity === null ? '' : `${countText(quote.agreedQuantity)} `;
   return (
     <>
-      <PageHeader title={quote.title} subtitle={`${quote.number}: ${quantity}for ${quote.customerName}`} />
+      <PageHeader
+        title={quote.title}
+        subtitle={`${quote.number}: ${quantity}for ${quote.customerName}`}
+      />
       <div className="max-w-3xl">
         <CanWeMakeIt quoteId={quote.id} by={quote.inHandsOn ?? undefined} />
       </div>

@@ -6,7 +6,11 @@ import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { BenchCalendar } from '../../../features/jobs/components/bench-calendar.tsx';
 import { JobTickets } from '../../../features/jobs/components/job-tickets.tsx';
-import { benchHoursQuery, finishedJobsQuery, openJobsQuery } from '../../../features/jobs/jobs.queries.ts';
+import {
+  benchHoursQuery,
+  finishedJobsQuery,
+  openJobsQuery,
+} from '../../../features/jobs/jobs.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 
@@ -39,7 +43,11 @@ export function Component() {
         <div>
           {open.items.length === 0 && <NoTickets isOwner={isOwner} />}
           {groups.map(({ state, title }) => (
-            <JobTickets key={state} title={title} jobs={open.items.filter((job) => job.state === state)} />
+            <JobTickets
+              key={state}
+              title={title}
+              jobs={open.items.filter((job) => job.state === state)}
+            />
           ))}
           <Finished jobs={finished.items} />
         </div>
@@ -66,7 +74,9 @@ function Finished({ jobs }: { jobs: readonly JobCard[] }) {
   if (jobs.length === 0) return null;
   return (
     <details>
-      <summary className="mb-2 min-h-11 py-2 font-semibold">Finished lately ({jobs.length})</summary>
+      <summary className="mb-2 min-h-11 py-2 font-semibold">
+        Finished lately ({jobs.length})
+      </summary>
       <JobTickets title="Finished" jobs={jobs} />
     </details>
   );

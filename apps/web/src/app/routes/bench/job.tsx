@@ -49,11 +49,17 @@ export function Component() {
           <LogList job={job} />
         </div>
         <div className="space-y-5">
-          {job.orderState === 'packed' && <ShipForm order={{ id: job.orderId, number: job.orderNumber }} />}
-          <div className="print:hidden">
-            <StockCard job={job} canTake={canLog} />
-          </div>
-          {canLog && <FinishCard key={finishKey(job)} job={job} />}
+          {job.orderState === 'packed' && (
+            <div className="print:hidden">
+              <ShipForm order={{ id: job.orderId, number: job.orderNumber }} />
+            </div>
+          )}
+          <StockCard job={job} canTake={canLog} />
+          {canLog && (
+            <div className="print:hidden">
+              <FinishCard key={finishKey(job)} job={job} />
+            </div>
+          )}
           <JobLayout job={job} />
         </div>
       </div>
@@ -62,7 +68,12 @@ export function Component() {
 }
 
 /** What the finishing form begins with changes with what is logged and taken. */
-const finishKey = (job: Job) => [...job.steps.map(({ good }) => good), ...job.lots.map(({ takenAreaMm2 }) => takenAreaMm2), ...job.hardware.map(({ taken }) => taken)].join(' ');
+const finishKey = ({ steps, lots, hardware }: Job): string =>
+  JSON.stringify([
+    steps.map(({ good }) => good),
+    lots.map(({ takenAreaMm2 }) => takenAreaMm2),
+    hardware.map(({ taken }) => taken),
+  ]);
 
 function TicketActions({ job }: { job: Job }) {
   return (

@@ -42,12 +42,17 @@ export function Component() {
 
   return (
     <>
-      <PageHeader title={`Change quote ${number}`} subtitle="Saving works it out again, with the prices of today." />
+      <PageHeader
+        title={`Change quote ${number}`}
+        subtitle="Saving works it out again, with the prices of today."
+      />
       <QuoteForm
         key={id}
         defaults={typedOf(opened)}
         customers={customerChoices(customers.items)}
-        newCustomer={(onAdded) => <AddCustomerForm brief onAdded={(customer) => onAdded(customer.id)} />}
+        newCustomer={(onAdded) => (
+          <AddCustomerForm brief onAdded={(customer) => onAdded(customer.id)} />
+        )}
         patterns={patterns}
         draftKey={`quote-${id}`}
         submitWord="Save the draft"
@@ -55,7 +60,10 @@ export function Component() {
         onReload={reload}
         onSend={async (body) => {
           const ifMatch = client.getQueryData<Quote>(queryKey)?.version ?? opened.version;
-          client.setQueryData(queryKey, await change.mutateAsync({ params: { id }, body, ifMatch }));
+          client.setQueryData(
+            queryKey,
+            await change.mutateAsync({ params: { id }, body, ifMatch }),
+          );
           say(`Quote ${number} is worked out again.`);
           await navigate(`/counter/quotes/${id}`);
         }}

@@ -10,5 +10,7 @@ const customers: SectionLink = { to: '/counter/customers', word: 'Customers' };
 export function CounterNav() {
   const { data: session } = useSuspenseQuery(sessionQuery());
   const forMaker = session.person?.role === 'maker';
-  return <SectionNav label="Counter" items={forMaker ? [quotes, orders] : [quotes, orders, customers]} />;
+  return (
+    <SectionNav label="Counter" items={forMaker ? [quotes, orders] : [quotes, orders, customers]} />
+  );
 }

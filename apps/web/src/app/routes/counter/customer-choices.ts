@@ -1,7 +1,9 @@
 import type { Customer } from '@hidewright/contract';
 
 /** Whom a quote can be for, by name. */
-export function customerChoices(customers: readonly Customer[]): { value: number; label: string }[] {
+export function customerChoices(
+  customers: readonly Customer[],
+): { value: number; label: string }[] {
   return customers
     .filter((customer) => customer.active)
     .map(({ id, name }) => ({ value: id, label: name }))

@@ -44,7 +44,9 @@ export function Component() {
           <QuotesTable
             rows={quotes?.pages.flatMap((page) => page.items) ?? []}
             withoutCustomer
-            empty={<EmptyState title="No quotes for them yet." action={isOwner ? newQuote : undefined} />}
+            empty={
+              <EmptyState title="No quotes for them yet." action={isOwner ? newQuote : undefined} />
+            }
           />
         </Card>
       </div>

@@ -18,7 +18,11 @@ export function Component() {
   const { data: session } = useSuspenseQuery(sessionQuery());
   const { data: customers } = useSuspenseQuery(customersQuery());
   const isOwner = session.person?.role === 'owner';
-  const add = <LinkButton to="/counter/customers/new" tone="primary">New customer</LinkButton>;
+  const add = (
+    <LinkButton to="/counter/customers/new" tone="primary">
+      New customer
+    </LinkButton>
+  );
   return (
     <>
       <PageHeader title="Customers" action={isOwner ? add : undefined} />

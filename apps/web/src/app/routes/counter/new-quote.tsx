@@ -12,7 +12,10 @@ import { queryClient } from '../../../lib/query-client.ts';
 import { customerChoices } from './customer-choices.ts';
 
 export async function loader() {
-  await Promise.all([queryClient.ensureQueryData(customersQuery()), queryClient.ensureQueryData(patternChoicesQuery())]);
+  await Promise.all([
+    queryClient.ensureQueryData(customersQuery()),
+    queryClient.ensureQueryData(patternChoicesQuery()),
+  ]);
   return null;
 }
 
@@ -22,13 +25,18 @@ export function Component() {
   const create = useCreateQuote();
   const { data: customers } = useSuspenseQuery(customersQuery());
   const { data: patterns } = useSuspenseQuery(patternChoicesQuery());
-  const customer = customerChoices(customers.items).find(({ value }) => value === Number(search.get('customer')));
+  const customer = customerChoices(customers.items).find(
+    ({ value }) => value === Number(search.get('customer')),
+  );
   const pattern = patterns.find(({ value }) => value === Number(search.get('pattern')));
   return (
     <>
       <PageHeader title="New quote" />
       <QuoteForm
-        defaults={startingWith(customer?.value, pattern?.value ?? (patterns.length === 1 ? patterns[0]?.value : undefined))}
+        defaults={startingWith(
+          customer?.value,
+          pattern?.value ?? (patterns.length === 1 ? patterns[0]?.value : undefined),
+        )}
         customers={customerChoices(customers.items)}
         newCustomer={(onAdded) => <AddCustomerForm brief onAdded={({ id }) => onAdded(id)} />}
         patterns={patterns}
@@ -46,7 +54,10 @@ export function Component() {
   );
 }
 
-function startingWith(customerId: number | undefined, patternId: number | undefined): Partial<TypedQuote> {
+function startingWith(
+  customerId: number | undefined,
+  patternId: number | undefined,
+): Partial<TypedQuote> {
   return {
     ...(customerId !== undefined && { customerId }),
     ...(patternId !== undefined && { patternId }),

@@ -35,7 +35,8 @@ export function Component() {
         {order.state === 'packed' && role !== 'bookkeeper' && <ShipForm order={order} />}
         <Card title="Where it comes from">
           <p>
-            <TextLink to={`/counter/quotes/${order.quoteId}`}>{order.quoteNumber}</TextLink>, made from {order.patternName}.
+            <TextLink to={`/counter/quotes/${order.quoteId}`}>{order.quoteNumber}</TextLink>, made
+            from {order.patternName}.
           </p>
         </Card>
       </div>
@@ -46,7 +47,12 @@ export function Component() {
 /** Once it is packed it can be invoiced. */
 function InvoiceAction({ order }: { order: Order }) {
   const { invoice } = order;
-  if (invoice) return <LinkButton to={`/books/invoices/${invoice.id}`}>Invoice {invoice.number ?? 'draft'}</LinkButton>;
+  if (invoice)
+    return (
+      <LinkButton to={`/books/invoices/${invoice.id}`}>
+        Invoice {invoice.number ?? 'draft'}
+      </LinkButton>
+    );
   if (!['packed', 'part shipped', 'shipped'].includes(order.state)) return null;
   return (
     <LinkButton tone="primary" to={`/books/invoices/new?order=${order.id}`}>

@@ -35,7 +35,9 @@ export function Component() {
       <PageTitle>{`Quote ${quote.number}`}</PageTitle>
       <QuoteTicket quote={quote} actions={isOwner && <QuoteActions quote={quote} />} />
       <Stitch className="my-5" />
-      {isOwner && quote.state === 'agreed' && <AcceptRun quote={quote} quantity={quantity} className="mb-5" />}
+      {isOwner && quote.state === 'agreed' && (
+        <AcceptRun quote={quote} quantity={quantity} className="mb-5" />
+      )}
       <div className="grid items-start gap-5 lg:grid-cols-2 xl:grid-cols-[minmax(0,25.5rem)_minmax(0,1fr)_minmax(0,20rem)]">
         <LayoutCard
           layout={quote.layout}

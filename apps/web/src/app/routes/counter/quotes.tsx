@@ -28,10 +28,16 @@ export function Component() {
   const [search] = useSearchParams();
   const state = stateIn(search);
   const { data: session } = useSuspenseQuery(sessionQuery());
-  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(quotesQuery({ state }));
+  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(
+    quotesQuery({ state }),
+  );
   if (!data) return <PageLoading />;
   const isOwner = session.person?.role === 'owner';
-  const start = isOwner ? <LinkButton to="/counter/quotes/new" tone="primary">New quote</LinkButton> : undefined;
+  const start = isOwner ? (
+    <LinkButton to="/counter/quotes/new" tone="primary">
+      New quote
+    </LinkButton>
+  ) : undefined;
   return (
     <>
       <PageHeader title="Quotes" action={start} />
@@ -56,7 +62,10 @@ export function Component() {
 
 function NoQuotes({ state, isOwner }: { state: QuoteState | undefined; isOwner: boolean }) {
   if (state !== undefined) return <EmptyState title={`No quote is ${state}.`} />;
-  if (!isOwner) return <EmptyState title="No quotes yet.">They appear here once the owner drafts one.</EmptyState>;
+  if (!isOwner)
+    return (
+      <EmptyState title="No quotes yet.">They appear here once the owner drafts one.</EmptyState>
+    );
   return (
     <EmptyState
       title="No quotes yet."
@@ -69,8 +78,8 @@ function NoQuotes({ state, isOwner }: { state: QuoteState | undefined; isOwner: 
         </>
       }
     >
-      A quote needs a pattern, which says how many pieces the leather gives and how long the work takes, and a
-      customer, whom you can add on the way.
+      A quote needs a pattern, which says how many pieces the leather gives and how long the work
+      takes, and a customer, whom you can add on the way.
     </EmptyState>
   );
 }

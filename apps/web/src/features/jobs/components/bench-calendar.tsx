@@ -13,8 +13,14 @@ export function BenchCalendar({ hours }: { hours: BenchHours }) {
   return (
     <Card title="Bench hours" subtitle="What open jobs will need, earliest promise first">
       {hours.late.map((job) => (
-        <Notice key={job.jobId} tone="danger" className="mb-3" title={`${job.number} ${job.title}:`}>
-          {hoursText(job.minutesShort)} short by {dayText(job.promisedOn, today)}. Move it, or work longer.
+        <Notice
+          key={job.jobId}
+          tone="danger"
+          className="mb-3"
+          title={`${job.number} ${job.title}:`}
+        >
+          {hoursText(job.minutesShort)} short by {dayText(job.promisedOn, today)}. Move it, or work
+          longer.
         </Notice>
       ))}
       <table className="w-full">
@@ -44,10 +50,16 @@ function DayRow({ day, today, longest }: { day: BenchDay; today: string; longest
         <span className={classNames(day.day === today && 'font-bold')}>{dayText(day.day)}</span>
       </th>
       <td className="py-2">
-        {isRest && day.promised.length === 0 ? <span className="text-sm text-ink-soft">no bench hours</span> : <Seam day={day} longest={longest} />}
+        {isRest && day.promised.length === 0 ? (
+          <span className="text-sm text-ink-soft">no bench hours</span>
+        ) : (
+          <Seam day={day} longest={longest} />
+        )}
         <Jobs day={day} />
       </td>
-      <td className="w-20 py-2 pl-3 text-right text-sm whitespace-nowrap">{isRest ? '' : `${hoursText(day.freeMinutes)} free`}</td>
+      <td className="w-20 py-2 pl-3 text-right text-sm whitespace-nowrap">
+        {isRest ? '' : `${hoursText(day.freeMinutes)} free`}
+      </td>
     </tr>
   );
 }
@@ -59,10 +71,15 @@ function Seam({ day, longest }: { day: BenchDay; longest: number }) {
   const worked = Math.min(Number(day.loggedMinutes), total);
   const taken = total - Number(day.freeMinutes);
   return (
-    <div aria-hidden="true" className="mt-1.5 flex gap-1" style={{ width: `${(total / longest) * 100}%` }}>
+    <div
+      aria-hidden="true"
+      className="mt-1.5 flex gap-1"
+      style={{ width: `${(total / longest) * 100}%` }}
+    >
       {Array.from({ length: stitches }, (_, at) => {
         const middle = ((at + 0.5) / stitches) * total;
-        const look = middle < worked ? 'bg-slate' : middle < taken ? 'bg-verdigris' : 'bg-stitch/60';
+        const look =
+          middle < worked ? 'bg-slate' : middle < taken ? 'bg-verdigris' : 'bg-stitch/60';
         return <span key={at} className={classNames('h-1.5 flex-1 rounded-full', look)} />;
       })}
     </div>
@@ -71,19 +88,23 @@ function Seam({ day, longest }: { day: BenchDay; longest: number }) {
 
 function Jobs({ day }: { day: BenchDay }) {
   const promised = new Set(day.promised.map(({ jobId }) => jobId));
-  const others = day.promised.filter(({ jobId }) => !day.planned.some((each) => each.jobId === jobId));
+  const others = day.promised.filter(
+    ({ jobId }) => !day.planned.some((each) => each.jobId === jobId),
+  );
   if (day.planned.length + others.length === 0) return null;
   return (
     <ul className="mt-1 text-sm">
       {day.planned.map((job) => (
         <li key={job.jobId}>
-          <TextLink to={`/bench/jobs/${job.jobId}`}>{job.number}</TextLink> {job.title}, {hoursText(job.minutes)}
+          <TextLink to={`/bench/jobs/${job.jobId}`}>{job.number}</TextLink> {job.title},{' '}
+          {hoursText(job.minutes)}
           {promised.has(job.jobId) && <strong>, to pack</strong>}
         </li>
       ))}
       {others.map((job) => (
         <li key={job.jobId}>
-          <TextLink to={`/bench/jobs/${job.jobId}`}>{job.number}</TextLink> {job.title}, <strong>to pack</strong>
+          <TextLink to={`/bench/jobs/${job.jobId}`}>{job.number}</TextLink> {job.title},{' '}
+          <strong>to pack</strong>
         </li>
       ))}
     </ul>

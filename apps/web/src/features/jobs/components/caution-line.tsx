@@ -8,7 +8,13 @@ const tones = {
 };
 
 /** A short caution beside the work that needs it. */
-export function CautionLine({ caution, className }: { caution: NonNullable<JobStep['caution']>; className?: string }) {
+export function CautionLine({
+  caution,
+  className,
+}: {
+  caution: NonNullable<JobStep['caution']>;
+  className?: string;
+}) {
   const { box, word } = tones[caution.level];
   return (
     <p className={classNames('rounded border-l-4 px-3.5 py-2.5', box, className)}>

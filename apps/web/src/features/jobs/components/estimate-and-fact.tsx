@@ -1,7 +1,13 @@
 import type { Compared, JobComparison } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
 import { Card } from '../../../components/card.tsx';
-import { areaText, minutesText, moneyText, numberText, percentText } from '../../../lib/formatting.ts';
+import {
+  areaText,
+  minutesText,
+  moneyText,
+  numberText,
+  percentText,
+} from '../../../lib/formatting.ts';
 import type { AreaUnit } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 

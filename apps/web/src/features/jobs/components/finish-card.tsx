@@ -45,10 +45,19 @@ export function FinishCard({ job }: { job: Job }) {
         <NumberField name="good" label="Good pieces" help={`${job.quantity} are ordered.`} />
         <NumberField name="seconds" label="Seconds" help="Good enough to sell for less." />
         {leather.map(({ lotId, tag }, at) => (
-          <AreaField key={lotId} name={`leatherLeft.${at}.areaMm2`} label={`Left of lot ${tag}`} help="Goes back on the rack." />
+          <AreaField
+            key={lotId}
+            name={`leatherLeft.${at}.areaMm2`}
+            label={`Left of lot ${tag}`}
+            help="Goes back on the rack."
+          />
         ))}
         {hardware.map(({ hardwareId, name }, at) => (
-          <NumberField key={hardwareId} name={`hardwareLeft.${at}.quantity`} label={`Left: ${name}`} />
+          <NumberField
+            key={hardwareId}
+            name={`hardwareLeft.${at}.quantity`}
+            label={`Left: ${name}`}
+          />
         ))}
       </Form>
     </Card>

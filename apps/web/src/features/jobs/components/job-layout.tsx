@@ -11,7 +11,10 @@ export function JobLayout({ job }: { job: Job }) {
   const { layout, outlinePath } = job;
   const { container } = layout;
   const height = container.form === 'panel' ? container.heightMm : container.widthMm;
-  const width = container.form === 'panel' ? container.widthMm : (container.lengthMm ?? layout.period?.mm ?? container.widthMm);
+  const width =
+    container.form === 'panel'
+      ? container.widthMm
+      : (container.lengthMm ?? layout.period?.mm ?? container.widthMm);
   const size = sizeText(String(width), String(height), lengthUnit);
   const from = containersText(job.containers, container.form).text;
   return (

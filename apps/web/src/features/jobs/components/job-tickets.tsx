@@ -65,13 +65,21 @@ function JobTicket({ job }: { job: JobCard }) {
   );
 }
 
-const verbs: Partial<Record<JobCard['state'], string>> = { ready: 'Begin', 'at the bench': 'Go on', paused: 'Look' };
+const verbs: Partial<Record<JobCard['state'], string>> = {
+  ready: 'Begin',
+  'at the bench': 'Go on',
+  paused: 'Look',
+};
 
 function Act({ job }: { job: JobCard }) {
   const verb = verbs[job.state];
   if (verb === undefined) return null;
   return (
-    <LinkButton to={`/bench/jobs/${job.id}`} tone={job.state === 'paused' ? 'secondary' : 'primary'} className="min-h-11">
+    <LinkButton
+      to={`/bench/jobs/${job.id}`}
+      tone={job.state === 'paused' ? 'secondary' : 'primary'}
+      className="min-h-11"
+    >
       {verb}
       <span className="sr-only"> with {job.number}</span>
     </LinkButton>
@@ -89,7 +97,9 @@ function Seam({ job }: { job: JobCard }) {
         of={job.progress.length}
         stitches={Math.max(1, job.progress.length)}
       />
-      <p className="mt-1 text-sm text-ink-soft">{job.step === null ? 'All steps are logged.' : `Next: ${job.step}`}</p>
+      <p className="mt-1 text-sm text-ink-soft">
+        {job.step === null ? 'All steps are logged.' : `Next: ${job.step}`}
+      </p>
     </div>
   );
 }

@@ -16,7 +16,12 @@ export function PauseButton({ job }: { job: Job }) {
   }
   if (job.state !== 'paused') return null;
   return (
-    <Button tone="primary" className="min-h-11" busy={resume.isPending} onClick={() => resume.mutate(input)}>
+    <Button
+      tone="primary"
+      className="min-h-11"
+      busy={resume.isPending}
+      onClick={() => resume.mutate(input)}
+    >
       Resume
     </Button>
   );

@@ -4,7 +4,10 @@ import { minutesText } from '../../../lib/formatting.ts';
 /** The steps on paper: what is planned, and room to write what was. */
 export function PrintedSteps({ job }: { job: Job }) {
   return (
-    <table className="mt-4 hidden w-full border-collapse print:table" aria-label="Steps, to write on">
+    <table
+      className="mt-4 hidden w-full border-collapse print:table"
+      aria-label="Steps, to write on"
+    >
       <thead>
         <tr className="border-b-2 border-edge text-left">
           {['Step', 'About', 'Of', 'Good', 'Rejects', 'Seconds', 'Minutes'].map((word) => (

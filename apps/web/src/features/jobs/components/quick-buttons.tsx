@@ -13,10 +13,18 @@ interface QuickButtonsProps {
 }
 
 /** One tap for a reject, a second, a row, a panel, or all that are left; and one to take a reject or second back. */
-export function QuickButtons({ step, perRow, perContainer, left, draft, change }: QuickButtonsProps) {
+export function QuickButtons({
+  step,
+  perRow,
+  perContainer,
+  left,
+  draft,
+  change,
+}: QuickButtonsProps) {
   const inPieces = step.per === 'piece' || step.per === 'strike';
   const none = left <= 0;
-  const more = (field: 'good' | 'rejects' | 'seconds', count: number) => change({ [field]: draft[field] + count });
+  const more = (field: 'good' | 'rejects' | 'seconds', count: number) =>
+    change({ [field]: draft[field] + count });
   return (
     <>
       <div className="flex flex-wrap gap-2.5">
@@ -51,12 +59,25 @@ interface Batch {
 }
 
 /** A row, a panel, all: each only where it is more than the one before, and where there are so many. */
-function batches(inPieces: boolean, perRow: number | null, perContainer: number, left: number): Batch[] {
+function batches(
+  inPieces: boolean,
+  perRow: number | null,
+  perContainer: number,
+  left: number,
+): Batch[] {
   const wanted: Batch[] = [
-    ...(inPieces ? [{ word: 'row of', count: perRow ?? 0 }, { word: 'panel of', count: perContainer }] : []),
+    ...(inPieces
+      ? [
+          { word: 'row of', count: perRow ?? 0 },
+          { word: 'panel of', count: perContainer },
+        ]
+      : []),
     { word: 'all', count: left },
   ];
-  return wanted.filter(({ count }, at) => count > 1 && count <= left && wanted.findIndex((each) => each.count === count) === at);
+  return wanted.filter(
+    ({ count }, at) =>
+      count > 1 && count <= left && wanted.findIndex((each) => each.count === count) === at,
+  );
 }
 
 interface TakeBackProps {
@@ -66,7 +87,9 @@ interface TakeBackProps {
 }
 
 function TakeBack({ step, draft, more }: TakeBackProps) {
-  const fields = (['rejects', 'seconds'] as const).filter((field) => step[field] + draft[field] > 0);
+  const fields = (['rejects', 'seconds'] as const).filter(
+    (field) => step[field] + draft[field] > 0,
+  );
   if (fields.length === 0) return null;
   return (
     <div className="flex flex-wrap gap-2.5">

@@ -27,7 +27,10 @@ export function StepCard(props: StepCardProps) {
   return (
     <section
       aria-labelledby={`${id}-name`}
-      className={classNames('card rounded bg-card shadow-card', open && 'border-l-6 border-verdigris')}
+      className={classNames(
+        'card rounded bg-card shadow-card',
+        open && 'border-l-6 border-verdigris',
+      )}
     >
       <h2 className="text-base">
         <button
@@ -39,7 +42,9 @@ export function StepCard(props: StepCardProps) {
           onClick={onToggle}
           className="flex min-h-11 w-full flex-wrap items-baseline gap-x-2 px-4 pt-3 text-left disabled:text-ink"
         >
-          <span className={classNames('text-base', open ? 'font-bold' : 'font-semibold')}>{step.name}</span>
+          <span className={classNames('text-base', open ? 'font-bold' : 'font-semibold')}>
+            {step.name}
+          </span>
           <span className="text-sm font-normal text-ink-soft">{stepLine(step)}</span>
         </button>
       </h2>
@@ -54,9 +59,15 @@ export function StepCard(props: StepCardProps) {
 
 function stepLine(step: JobStep): string {
   const handled = step.good + step.rejects + step.seconds;
-  const parts = [`${handled} of ${step.limit}${step.per === 'panel' || step.per === 'strip' ? ` ${step.per}s` : ''}`];
+  const parts = [
+    `${handled} of ${step.limit}${step.per === 'panel' || step.per === 'strip' ? ` ${step.per}s` : ''}`,
+  ];
   if (step.rejects > 0) parts.push(`${step.rejects} ${step.rejects === 1 ? 'reject' : 'rejects'}`);
   if (step.seconds > 0) parts.push(`${step.seconds} ${step.seconds === 1 ? 'second' : 'seconds'}`);
-  parts.push(step.minutes === '0' ? `about ${minutesText(step.plannedMinutes)}` : `${minutesText(step.minutes)} of about ${minutesText(step.plannedMinutes)}`);
+  parts.push(
+    step.minutes === '0'
+      ? `about ${minutesText(step.plannedMinutes)}`
+      : `${minutesText(step.minutes)} of about ${minutesText(step.plannedMinutes)}`,
+  );
   return parts.join(' · ');
 }

@@ -42,6 +42,7 @@ export function StepList({ job, waiting, refused, canLog, onLog }: StepListProps
 /** What is logged on this device counts at once, whether or not it has arrived. */
 function withWaiting(step: JobStep, waiting: readonly WaitingLog[]): JobStep {
   const own = waiting.filter(({ body }) => body.stepId === step.id).map(({ body }) => body);
-  const sum = (field: 'good' | 'rejects' | 'seconds') => own.reduce((total, body) => total + (body[field] ?? 0), step[field]);
+  const sum = (field: 'good' | 'rejects' | 'seconds') =>
+    own.reduce((total, body) => total + (body[field] ?? 0), step[field]);
   return { ...step, good: sum('good'), rejects: sum('rejects'), seconds: sum('seconds') };
 }

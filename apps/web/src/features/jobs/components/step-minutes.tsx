@@ -60,7 +60,8 @@ function Clock({ draft, change }: StepMinutesProps) {
       </Button>
     );
   }
-  const stop = () => change({ clockFrom: null, minutes: plus(draft.minutes, clockMinutes(clockFrom, Date.now())) });
+  const stop = () =>
+    change({ clockFrom: null, minutes: plus(draft.minutes, clockMinutes(clockFrom, Date.now())) });
   return (
     <Button size="bench" className="grow" onClick={stop}>
       <Pause size={20} aria-hidden="true" /> Stop, {clockMinutes(clockFrom, now)} min

@@ -36,13 +36,19 @@ export function StockCard({ job, canTake }: StockCardProps) {
       )}
       <ul aria-label="Lots" className="divide-y divide-stitch/60">
         {job.lots.map((lot) => (
-          <Line key={lot.lotId} title={<LotTitle lot={lot} />} detail={lotLine(lot, (mm2) => areaText(mm2, areaUnit))}>
+          <Line
+            key={lot.lotId}
+            title={<LotTitle lot={lot} />}
+            detail={lotLine(lot, (mm2) => areaText(mm2, areaUnit))}
+          >
             {canTake && lot.heldAreaMm2 !== '0' && (
               <Button
                 size="bench"
                 className="text-base"
                 busy={busyWith('lotId', lot.lotId)}
-                onClick={() => take({ lotId: lot.lotId, areaMm2: lot.heldAreaMm2 }, `Taken from lot ${lot.tag}.`)}
+                onClick={() =>
+                  take({ lotId: lot.lotId, areaMm2: lot.heldAreaMm2 }, `Taken from lot ${lot.tag}.`)
+                }
               >
                 Take {areaText(lot.heldAreaMm2, areaUnit)}
               </Button>
@@ -51,18 +57,32 @@ export function StockCard({ job, canTake }: StockCardProps) {
         ))}
       </ul>
       {job.lots.length === 0 && (
-        <EmptyState title={`No ${job.leatherName} on the rack.`}>Receive a lot in the Stockroom, then take from it here.</EmptyState>
+        <EmptyState title={`No ${job.leatherName} on the rack.`}>
+          Receive a lot in the Stockroom, then take from it here.
+        </EmptyState>
       )}
       {job.hardware.length > 0 && (
-        <ul aria-label="Hardware" className="mt-2 divide-y divide-stitch/60 border-t border-stitch/60">
+        <ul
+          aria-label="Hardware"
+          className="mt-2 divide-y divide-stitch/60 border-t border-stitch/60"
+        >
           {job.hardware.map((item) => (
-            <Line key={item.hardwareId} title={<strong>{item.name}</strong>} detail={hardwareLine(item)}>
+            <Line
+              key={item.hardwareId}
+              title={<strong>{item.name}</strong>}
+              detail={hardwareLine(item)}
+            >
               {canTake && item.held > 0 && (
                 <Button
                   size="bench"
                   className="text-base"
                   busy={busyWith('hardwareId', item.hardwareId)}
-                  onClick={() => take({ hardwareId: item.hardwareId, quantity: item.held }, `Taken: ${item.held} ${item.name}.`)}
+                  onClick={() =>
+                    take(
+                      { hardwareId: item.hardwareId, quantity: item.held },
+                      `Taken: ${item.held} ${item.name}.`,
+                    )
+                  }
                 >
                   Take {countText(item.held)}
                 </Button>
@@ -76,7 +96,15 @@ export function StockCard({ job, canTake }: StockCardProps) {
   );
 }
 
-function Line({ title, detail, children }: { title: ReactNode; detail: string; children?: ReactNode }) {
+function Line({
+  title,
+  detail,
+  children,
+}: {
+  title: ReactNode;
+  detail: string;
+  children?: ReactNode;
+}) {
   return (
     <li className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2 py-2.5">
       <div>

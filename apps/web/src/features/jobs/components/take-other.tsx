@@ -43,7 +43,8 @@ const [leatherTaking, hardwareTaking] = shapesOf();
 
 /** The two shapes of a taking, as the contract has them. */
 function shapesOf() {
-  if (!(takeForJob.body instanceof z.ZodUnion)) throw new TypeError('A taking is of leather or of hardware');
+  if (!(takeForJob.body instanceof z.ZodUnion))
+    throw new TypeError('A taking is of leather or of hardware');
   return takeForJob.body.options;
 }
 
@@ -79,7 +80,10 @@ function TakeLeather({ job, onDone }: TakeProps) {
 
 function TakeHardware({ job, onDone }: TakeProps) {
   const { mutateAsync } = useTakeForJob();
-  const choices = job.hardware.map((item) => ({ value: item.hardwareId, label: `${item.name}: ${item.free} free` }));
+  const choices = job.hardware.map((item) => ({
+    value: item.hardwareId,
+    label: `${item.name}: ${item.free} free`,
+  }));
   return (
     <Form
       schema={hardwareTaking}

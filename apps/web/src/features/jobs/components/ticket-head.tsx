@@ -37,19 +37,25 @@ export function TicketHead({ job, actions }: { job: Job; actions?: ReactNode }) 
 
 function toolsAndLot(job: Job): ReactNode[] {
   const { plate, die, lots } = job;
-  const own = lots.filter(({ heldAreaMm2, takenAreaMm2 }) => heldAreaMm2 !== '0' || takenAreaMm2 !== '0');
+  const own = lots.filter(
+    ({ heldAreaMm2, takenAreaMm2 }) => heldAreaMm2 !== '0' || takenAreaMm2 !== '0',
+  );
   const parts: ReactNode[] = [];
   if (job.needsPlate) parts.push(named('plate', plate?.number ?? 'not here yet'));
   if (plate && plate.slot !== '') parts.push(named('slot', plate.slot));
   if (job.needsDie) parts.push(named('die', die?.number ?? 'not here yet'));
   if (die && die.slot !== '' && die.slot !== plate?.slot) parts.push(named('slot', die.slot));
-  parts.push(named(own.length > 1 ? 'lots' : 'lot', own.map(({ tag }) => tag).join(', ') || 'none held'));
+  parts.push(
+    named(own.length > 1 ? 'lots' : 'lot', own.map(({ tag }) => tag).join(', ') || 'none held'),
+  );
   return parts;
 }
 
 function howMany(job: Job): ReactNode[] {
   const containers = containersText(job.containers, job.layout.container.form);
-  const parts = [named(job.needsPlate ? 'case' : 'from', countText(job.containers), containers.unit)];
+  const parts = [
+    named(job.needsPlate ? 'case' : 'from', countText(job.containers), containers.unit),
+  ];
   if (job.needsPlate) parts.push(named('strike', countText(job.cutCount)));
   return [...parts, named('cut', countText(job.cutCount)), named('need', countText(job.quantity))];
 }

@@ -7,13 +7,19 @@ export function OfferAgreed({ offer }: { offer: Offer }) {
   const rung = offer.breaks.find((each) => each.quantity === offer.agreedQuantity);
   if (!rung) return null;
   return (
-    <section aria-labelledby="agreed" className="rounded border-2 border-verdigris bg-verdigris-pale p-4">
+    <section
+      aria-labelledby="agreed"
+      className="rounded border-2 border-verdigris bg-verdigris-pale p-4"
+    >
       <div role="status">
         <h2 id="agreed">{`You agreed to ${countText(rung.quantity)}`}</h2>
         {offer.agreedOn && <p className="text-ink-soft">{`on ${longDayText(offer.agreedOn)}`}</p>}
       </div>
       <dl className="mt-3 space-y-1">
-        <Line word={`${countText(rung.quantity)} at ${unitPriceText(rung.priceEach)} each`} amount={rung.goodsTotal} />
+        <Line
+          word={`${countText(rung.quantity)} at ${unitPriceText(rung.priceEach)} each`}
+          amount={rung.goodsTotal}
+        />
         {offer.tooling.map((tool) => (
           <Line key={tool.name} word={`${tool.name}, charged once`} amount={tool.charge} />
         ))}
@@ -27,7 +33,15 @@ export function OfferAgreed({ offer }: { offer: Offer }) {
   );
 }
 
-function Line({ word, amount, strong = false }: { word: string; amount: string; strong?: boolean }) {
+function Line({
+  word,
+  amount,
+  strong = false,
+}: {
+  word: string;
+  amount: string;
+  strong?: boolean;
+}) {
   return (
     <div className={`flex justify-between gap-4 ${strong ? 'font-bold' : ''}`}>
       <dt>{word}</dt>

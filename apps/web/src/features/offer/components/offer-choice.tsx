@@ -27,7 +27,9 @@ export function OfferChoice({ offer, token }: { offer: Offer; token: string }) {
     try {
       await send.mutateAsync({ params: { token }, body: { quantity: chosen } });
     } catch (error) {
-      setRefusal(error instanceof ApiProblem ? error.detail : 'That did not work. Try again in a moment.');
+      setRefusal(
+        error instanceof ApiProblem ? error.detail : 'That did not work. Try again in a moment.',
+      );
     }
   }
 

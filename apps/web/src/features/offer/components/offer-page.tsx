@@ -23,7 +23,8 @@ export function OfferPage({ offer, token }: { offer: Offer; token: string }) {
             {`For ${offer.customerName}`}
             {offer.inHandsOn && (
               <>
-                , with you by <strong className="font-semibold">{longDayText(offer.inHandsOn)}</strong>
+                , with you by{' '}
+                <strong className="font-semibold">{longDayText(offer.inHandsOn)}</strong>
               </>
             )}
             .
@@ -40,10 +41,14 @@ export function OfferPage({ offer, token }: { offer: Offer; token: string }) {
 function OfferAnswer({ offer, token }: { offer: Offer; token: string }) {
   if (offer.state === 'agreed') return <OfferAgreed offer={offer} />;
   if (offer.state === 'declined') {
-    return <Notice tone="info">{`This quote was declined. Ask ${offer.shopName} for a new one.`}</Notice>;
+    return (
+      <Notice tone="info">{`This quote was declined. Ask ${offer.shopName} for a new one.`}</Notice>
+    );
   }
   if (offer.state === 'lapsed') {
-    return <Notice tone="attention">{`This offer has run out. Ask ${offer.shopName} for a new one.`}</Notice>;
+    return (
+      <Notice tone="attention">{`This offer has run out. Ask ${offer.shopName} for a new one.`}</Notice>
+    );
   }
   return (
     <>

@@ -16,7 +16,9 @@ export function PiecePicture({ outline }: { outline: NonNullable<Offer['outline'
       className="block w-full rounded bg-panel/40"
     >
       <title id={id}>{`The piece: ${outline.words}`}</title>
-      <g transform={`rotate(-8 ${middleX} ${middleY}) translate(${middleX} ${middleY}) scale(0.86) translate(${-middleX} ${-middleY})`}>
+      <g
+        transform={`rotate(-8 ${middleX} ${middleY}) translate(${middleX} ${middleY}) scale(0.86) translate(${-middleX} ${-middleY})`}
+      >
         <path ref={measure} d={outline.path} fillRule="evenodd" className="fill-russet" />
       </g>
     </svg>

@@ -24,7 +24,11 @@ export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProp
   const { today } = useWorkshop();
   const id = useId();
   const [chosen, setChosen] = useState(by !== undefined && by >= today ? by : undefined);
-  const { data: check, error, isFetching } = useQuery(checkQuery(quoteId, { quantity, by: chosen }));
+  const {
+    data: check,
+    error,
+    isFetching,
+  } = useQuery(checkQuery(quoteId, { quantity, by: chosen }));
   return (
     <Card title="Can we make it?">
       <div className="mb-4 flex flex-wrap items-end gap-x-4 gap-y-2">
@@ -37,7 +41,9 @@ export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProp
             type="date"
             min={today}
             value={chosen ?? check?.by ?? ''}
-            onChange={(event) => setChosen(event.target.value === '' ? undefined : event.target.value)}
+            onChange={(event) =>
+              setChosen(event.target.value === '' ? undefined : event.target.value)
+            }
             className="min-h-10 rounded border border-edge bg-card px-3 py-1.5"
           />
         </div>
@@ -64,7 +70,12 @@ export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProp
   );
 }
 
-const words = { leather: 'leather', hardware: 'hardware', tooling: 'tooling', hours: 'bench hours' };
+const words = {
+  leather: 'leather',
+  hardware: 'hardware',
+  tooling: 'tooling',
+  hours: 'bench hours',
+};
 
 function Verdict({ check }: { check: RunCheck }) {
   const { today } = useWorkshop();
@@ -76,11 +87,15 @@ function Verdict({ check }: { check: RunCheck }) {
       </Notice>
     );
   }
-  const short = [...new Set(check.answers.filter(({ enough }) => !enough).map(({ about }) => words[about]))];
+  const short = [
+    ...new Set(check.answers.filter(({ enough }) => !enough).map(({ about }) => words[about])),
+  ];
   return (
     <Notice tone="danger" live title={`Not by ${by}:`}>
       {short.join(' and ')} {short.length === 1 && short[0] !== 'bench hours' ? 'is' : 'are'} short.
-      {check.earliestDay !== null && check.earliestDay > check.by && ` The bench has the hours by ${dayText(check.earliestDay, today)}.`}
+      {check.earliestDay !== null &&
+        check.earliestDay > check.by &&
+        ` The bench has the hours by ${dayText(check.earliestDay, today)}.`}
     </Notice>
   );
 }

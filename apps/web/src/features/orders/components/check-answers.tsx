@@ -7,8 +7,13 @@ export function CheckAnswers({ check }: { check: RunCheck }) {
   return (
     <ul className="my-4 divide-y divide-stitch/60" aria-label="Answers">
       {check.answers.map((answer) => (
-        <li key={`${answer.about} ${answer.name}`} className="flex flex-wrap items-baseline gap-x-3 gap-y-1 py-2.5">
-          <StateMark state={answer.enough ? 'received' : 'short'}>{answer.enough ? 'enough' : 'short'}</StateMark>
+        <li
+          key={`${answer.about} ${answer.name}`}
+          className="flex flex-wrap items-baseline gap-x-3 gap-y-1 py-2.5"
+        >
+          <StateMark state={answer.enough ? 'received' : 'short'}>
+            {answer.enough ? 'enough' : 'short'}
+          </StateMark>
           <span className="min-w-0 grow basis-72">{answer.sentence}</span>
           {!answer.enough && <Remedy about={answer.about} />}
         </li>

@@ -8,7 +8,13 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 export function OrderFigures({ order }: { order: Order }) {
   const { currency } = useWorkshop();
   const { priceEach, goodsTotal, toolingCharge, total } = order;
-  if (priceEach === undefined || goodsTotal === undefined || toolingCharge === undefined || total === undefined) return null;
+  if (
+    priceEach === undefined ||
+    goodsTotal === undefined ||
+    toolingCharge === undefined ||
+    total === undefined
+  )
+    return null;
   return (
     <Card title="What was agreed" subtitle={`In ${currency}, before tax`}>
       <KeyFigures

@@ -26,8 +26,12 @@ export function OrderTicket({ order, actions }: { order: Order; actions?: ReactN
               </span>
             </TicketFact>
             <TicketFact word="Promised">{dayText(order.promisedOn, today)}</TicketFact>
-            {order.inHandsOn !== null && <TicketFact word="In hands">{dayText(order.inHandsOn, today)}</TicketFact>}
-            {order.shippedOn !== null && <TicketFact word="Shipped">{dayText(order.shippedOn, today)}</TicketFact>}
+            {order.inHandsOn !== null && (
+              <TicketFact word="In hands">{dayText(order.inHandsOn, today)}</TicketFact>
+            )}
+            {order.shippedOn !== null && (
+              <TicketFact word="Shipped">{dayText(order.shippedOn, today)}</TicketFact>
+            )}
           </>
         }
         actions={actions}

@@ -23,11 +23,15 @@ export function TakeOnForm({ quoteId, inHandsOn, check, onTakenOn }: TakeOnFormP
       schema={takeOnOrder.body}
       draftKey={`take-on-${quoteId}`}
       defaults={{ quoteId, promisedOn: check.by, awaits: [], evenIfShort: false }}
-      onSend={async (body) => onTakenOn(await mutateAsync({ body: { ...body, promisedOn: check.by } }))}
+      onSend={async (body) =>
+        onTakenOn(await mutateAsync({ body: { ...body, promisedOn: check.by } }))
+      }
       submitWord={`Take it on, packed by ${dayText(check.by, today)}`}
     >
       {inHandsOn !== null && check.by > inHandsOn && (
-        <Notice tone="attention">The customer needs it in hands on {dayText(inHandsOn, today)}, before that day.</Notice>
+        <Notice tone="attention">
+          The customer needs it in hands on {dayText(inHandsOn, today)}, before that day.
+        </Notice>
       )}
       <AwaitsField />
       {!check.yes && (

@@ -27,7 +27,7 @@ export function StepsTable({ steps }: { steps: Steps }) {
       </thead>
       <tbody>
         {steps.map((step, at) => (
-          <tr key={at} className="stitched bg-top">
+          <tr key={at} className="stitched bg-[length:100%_2px] bg-top">
             <th scope="row" className="py-1.5 text-left font-semibold">
               {`${at + 1} ${step.name}`}
             </th>

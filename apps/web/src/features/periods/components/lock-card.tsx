@@ -76,8 +76,9 @@ function Lockable({ sheet }: { sheet: SalesSheet }) {
       >
         Nobody can issue an invoice or record a payment on these days afterwards, and they cannot be
         opened again.
-        {toDay === today && ' That includes today: nothing more can be entered until tomorrow.'} They
-        are kept with a total of {moneyText(totals.total)} {currency}, of which tax{' '}
+        {toDay === today &&
+          ' That includes today: nothing more can be entered until tomorrow.'}{' '}
+        They are kept with a total of {moneyText(totals.total)} {currency}, of which tax{' '}
         {moneyText(totals.tax)}, and {moneyText(totals.received)} received.
       </ConfirmDialog>
     </>

@@ -13,7 +13,7 @@ interface OrderLinesProps {
 
 /** What is ordered, line by line, and what it comes to. */
 export function OrderLines({ leathers, hardware }: OrderLinesProps) {
-  const { fields, append, remove } = useFieldArray({ name: 'lines' });
+  const { fields, append, remove } = useFieldArray<{ lines: TypedLine[] }>({ name: 'lines' });
   const { currency } = useWorkshop();
   const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
   const add = (of: TypedLine['of']) =>
@@ -26,8 +26,8 @@ export function OrderLines({ leathers, hardware }: OrderLinesProps) {
           <OrderLine
             key={field.id}
             at={at}
-            of={lines[at]?.of ?? 'hardware'}
-            goods={lines[at]?.of === 'leather' ? leathers : hardware}
+            of={field.of}
+            goods={field.of === 'leather' ? leathers : hardware}
             onRemove={() => remove(at)}
           />
         ))}

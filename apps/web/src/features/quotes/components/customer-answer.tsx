@@ -24,7 +24,9 @@ export function CustomerAnswer({ quote, quantity, isOwner }: CustomerAnswerProps
         <LetterState quote={quote} isOwner={isOwner} />
         {quote.state === 'agreed' && <Agreed quote={quote} />}
         {quote.state === 'declined' && <p>They declined. A revision can offer it again.</p>}
-        {quote.state === 'lapsed' && <p>They did not answer in time. A revision can offer it again.</p>}
+        {quote.state === 'lapsed' && (
+          <p>They did not answer in time. A revision can offer it again.</p>
+        )}
         {open && isOwner && <NoteAnswer quote={quote} quantity={quantity} />}
       </div>
     </Card>

@@ -20,11 +20,14 @@ interface LayoutCardProps {
 export function LayoutCard({ layout, outlinePath, patternName, rung }: LayoutCardProps) {
   const { container } = layout;
   const heightMm = container.form === 'panel' ? container.heightMm : container.widthMm;
-  const widthMm = container.form === 'panel' ? container.widthMm : (container.lengthMm ?? layout.period?.mm ?? 0);
+  const widthMm =
+    container.form === 'panel' ? container.widthMm : (container.lengthMm ?? layout.period?.mm ?? 0);
   return (
     <Card title="Layout" subtitle={inWords(layout)}>
       {outlinePath === null || layout.by === 'hand count' ? (
-        <p className="mb-4 rounded bg-panel/40 px-4 py-8 text-center">Counted by hand, so there is no picture.</p>
+        <p className="mb-4 rounded bg-panel/40 px-4 py-8 text-center">
+          Counted by hand, so there is no picture.
+        </p>
       ) : (
         <LayoutPicture
           className="mb-5"
@@ -57,11 +60,16 @@ function Figures({ layout, rung }: Pick<LayoutCardProps, 'layout' | 'rung'>) {
     figures.push({
       word: 'yield',
       figure: percentText(layout.yieldPercent),
-      note: layout.boundPieces === null ? undefined : `at most ${countText(layout.boundPieces)} could fit`,
+      note:
+        layout.boundPieces === null
+          ? undefined
+          : `at most ${countText(layout.boundPieces)} could fit`,
     });
   }
   if (layout.pitchMm !== null && layout.rowStepMm !== null) {
-    const [pitch, step] = [layout.pitchMm, layout.rowStepMm].map((mm) => lengthText(String(mm), lengthUnit));
+    const [pitch, step] = [layout.pitchMm, layout.rowStepMm].map((mm) =>
+      lengthText(String(mm), lengthUnit),
+    );
     figures.push({ word: 'pitch · row step', figure: `${pitch} · ${step}` });
   }
   return <KeyFigures figures={figures} />;

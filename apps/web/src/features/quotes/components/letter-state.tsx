@@ -16,9 +16,15 @@ export function LetterState({ quote, isOwner }: { quote: Quote; isOwner: boolean
     <div className="space-y-2">
       {letter === null && <p>{`Sent by hand, ${instantText(quote.sentAt, timeZone)}.`}</p>}
       {letter?.state === 'waiting' && (
-        <p role="status">{letter.lastError ? 'The mail has not left yet; it is tried again.' : 'The mail is about to leave.'}</p>
+        <p role="status">
+          {letter.lastError
+            ? 'The mail has not left yet; it is tried again.'
+            : 'The mail is about to leave.'}
+        </p>
       )}
-      {letter?.state === 'sent' && letter.sentAt && <p role="status">{`Mailed ${instantText(letter.sentAt, timeZone)}.`}</p>}
+      {letter?.state === 'sent' && letter.sentAt && (
+        <p role="status">{`Mailed ${instantText(letter.sentAt, timeZone)}.`}</p>
+      )}
       {letter?.state === 'failed' && (
         <Notice tone="danger">The mail could not be delivered. Send it again, or by hand.</Notice>
       )}

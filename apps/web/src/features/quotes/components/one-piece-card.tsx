@@ -17,8 +17,14 @@ export function OnePieceCard({ rung, tooling }: OnePieceCardProps) {
   const lines = linesOf(rung, (kind) => setOpened(kind === opened ? undefined : kind));
   const workings = rung.costLines.filter((line) => line.kind === opened);
   return (
-    <Card title={`One piece at ${countText(rung.quantity)}`} subtitle="press a line for its workings">
-      <Waterfall label={`From the price of one piece at ${countText(rung.quantity)} to what is left`} lines={lines} />
+    <Card
+      title={`One piece at ${countText(rung.quantity)}`}
+      subtitle="press a line for its workings"
+    >
+      <Waterfall
+        label={`From the price of one piece at ${countText(rung.quantity)} to what is left`}
+        lines={lines}
+      />
       <div role="status" className="text-sm text-ink-soft">
         {workings.map((line) => (
           <p key={line.name} className="mt-1.5">

@@ -27,7 +27,9 @@ export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
             help={`The pattern says ${percentText(work.rejectPercent)}.`}
           />
         ) : (
-          <p className="text-sm text-ink-soft">This pattern has its rejects at each step; change them there.</p>
+          <p className="text-sm text-ink-soft">
+            This pattern has its rejects at each step; change them there.
+          </p>
         )}
       </div>
     </details>

@@ -3,7 +3,13 @@ import { Card } from '../../../components/card.tsx';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { PriceLadder } from '../../../components/price-ladder.tsx';
-import { countText, hoursText, moneyText, percentText, unitPriceText } from '../../../lib/formatting.ts';
+import {
+  countText,
+  hoursText,
+  moneyText,
+  percentText,
+  unitPriceText,
+} from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 interface PriceBreaksCardProps {
@@ -19,10 +25,16 @@ export function PriceBreaksCard({ numbers, target, chosen, onChoose }: PriceBrea
   const rungs = numbers.breaks.map((rung) => ({ ...rung, unitPrice: rung.priceEach }));
   return (
     <Card title="Price breaks" subtitle={`what is left per hour, in ${currency}`}>
-      <PriceLadder rungs={rungs} target={target} currency={currency} chosen={chosen} onChoose={onChoose} />
+      <PriceLadder
+        rungs={rungs}
+        target={target}
+        currency={currency}
+        chosen={chosen}
+        onChoose={onChoose}
+      />
       <p className="mt-2 text-sm text-ink-soft">
-        Bench: left after everything bought, by bench hours. All in, the mark on the rung: after wages too, by all
-        hours, desk time included.
+        Bench: left after everything bought, by bench hours. All in, the mark on the rung: after
+        wages too, by all hours, desk time included.
       </p>
       <TypedPrices numbers={numbers} />
       <Warnings numbers={numbers} chosen={chosen} />
@@ -38,7 +50,10 @@ function TypedPrices({ numbers }: Pick<PriceBreaksCardProps, 'numbers'>) {
   return (
     <p className="mt-2 text-sm text-ink-soft">
       {`Your own price at ${typed
-        .map((rung) => `${countText(rung.quantity)} (worked out: ${unitPriceText(rung.suggestedPrice)})`)
+        .map(
+          (rung) =>
+            `${countText(rung.quantity)} (worked out: ${unitPriceText(rung.suggestedPrice)})`,
+        )
         .join(', ')}.`}
     </p>
   );
@@ -79,9 +94,17 @@ function ChosenRung({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 
             figure: moneyText(rung.total),
             note: tooled ? `tooling ${moneyText(rung.toolingCharge)} of it` : undefined,
           },
-          { word: 'margin', figure: percentText(rung.marginPercent), note: 'after wages and desk time' },
+          {
+            word: 'margin',
+            figure: percentText(rung.marginPercent),
+            note: 'after wages and desk time',
+          },
           { word: 'left', figure: moneyText(rung.left), note: 'after everything bought' },
-          { word: 'bench time', figure: hoursText(rung.benchMinutes), note: `all hours ${hoursText(rung.allMinutes)}` },
+          {
+            word: 'bench time',
+            figure: hoursText(rung.benchMinutes),
+            note: `all hours ${hoursText(rung.allMinutes)}`,
+          },
         ]}
       />
     </div>

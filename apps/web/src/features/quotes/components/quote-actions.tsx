@@ -25,7 +25,11 @@ export function QuoteActions({ quote }: { quote: Quote }) {
       )}
       {out && <Button onClick={() => setSending(true)}>Send again</Button>}
       <ReviseButton quote={quote} />
-      <a href={addressOf(quotePaper, { params: { id: quote.id } })} download className={buttonLook({})}>
+      <a
+        href={addressOf(quotePaper, { params: { id: quote.id } })}
+        download
+        className={buttonLook({})}
+      >
         PDF
       </a>
       <SendDialog quote={quote} open={sending} onOpenChange={setSending} />

@@ -44,14 +44,22 @@ export function QuoteForm(props: QuoteFormProps) {
       submitWord={submitWord}
       onSend={onSend}
       {...(onReload && { onReload })}
-      actions={<LinkButton to={cancelTo} tone="quiet">Leave it</LinkButton>}
+      actions={
+        <LinkButton to={cancelTo} tone="quiet">
+          Leave it
+        </LinkButton>
+      }
     >
       <QuoteFields {...fields} />
     </Form>
   );
 }
 
-function QuoteFields({ customers, newCustomer, patterns }: Pick<QuoteFormProps, 'customers' | 'newCustomer' | 'patterns'>) {
+function QuoteFields({
+  customers,
+  newCustomer,
+  patterns,
+}: Pick<QuoteFormProps, 'customers' | 'newCustomer' | 'patterns'>) {
   const { today } = useWorkshop();
   const { basis, preview } = usePreview();
   const numbers = preview && 'numbers' in preview ? preview.numbers : undefined;
@@ -62,8 +70,20 @@ function QuoteFields({ customers, newCustomer, patterns }: Pick<QuoteFormProps, 
         <div className="space-y-5">
           <CustomerField choices={customers} newCustomer={newCustomer} />
           <PatternField choices={patterns} />
-          <TextField name="title" label="What the customer calls it" optional help="The pattern’s name, if left empty." />
-          <DayField name="inHandsOn" label="In hands" optional min={today} whenEmpty="null" help="The day the goods must be with the customer." />
+          <TextField
+            name="title"
+            label="What the customer calls it"
+            optional
+            help="The pattern’s name, if left empty."
+          />
+          <DayField
+            name="inHandsOn"
+            label="In hands"
+            optional
+            min={today}
+            whenEmpty="null"
+            help="The day the goods must be with the customer."
+          />
           <Stitch />
           <RungFields workedOut={workedOut} />
           <Stitch />
@@ -79,7 +99,10 @@ function QuoteFields({ customers, newCustomer, patterns }: Pick<QuoteFormProps, 
 }
 
 function toolsFor(basis: { needsDie: boolean; needsPlate: boolean } | undefined): string[] {
-  return [...(basis?.needsDie ? ['Cutting die'] : []), ...(basis?.needsPlate ? ['Stamp plate'] : [])];
+  return [
+    ...(basis?.needsDie ? ['Cutting die'] : []),
+    ...(basis?.needsPlate ? ['Stamp plate'] : []),
+  ];
 }
 
 /** A saved quote as it would be typed. */
@@ -98,7 +121,10 @@ export function typedOf(quote: {
     patternId: quote.patternId,
     title: quote.title,
     inHandsOn: quote.inHandsOn,
-    breaks: quote.breaks.map(({ quantity, typedPrice }) => ({ quantity, typedPrice: typedPrice ?? null })),
+    breaks: quote.breaks.map(({ quantity, typedPrice }) => ({
+      quantity,
+      typedPrice: typedPrice ?? null,
+    })),
     tooling: quote.tooling.map(({ name, cost = '0', charge = '0' }) => ({ name, cost, charge })),
     message: quote.message ?? '',
     overrides: quote.overrides,

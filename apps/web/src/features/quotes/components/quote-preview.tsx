@@ -37,7 +37,12 @@ export function QuotePreview({ basis, preview }: PreviewSoFar) {
   return (
     <div className={beside}>
       {rung && (
-        <PriceBreaksCard numbers={numbers} target={input.targetPerHour} chosen={rung.quantity} onChoose={setPicked} />
+        <PriceBreaksCard
+          numbers={numbers}
+          target={input.targetPerHour}
+          chosen={rung.quantity}
+          onChoose={setPicked}
+        />
       )}
       {rung && <OnePieceCard rung={rung} tooling={input.tooling} />}
       {layout}
@@ -46,6 +51,9 @@ export function QuotePreview({ basis, preview }: PreviewSoFar) {
 }
 
 /** The picked rung, or the second one: large enough to be wanted, small enough to be doubted. */
-export function rungAt<Rung extends { quantity: number }>(rungs: readonly Rung[], picked: number | undefined) {
+export function rungAt<Rung extends { quantity: number }>(
+  rungs: readonly Rung[],
+  picked: number | undefined,
+) {
   return rungs.find((rung) => rung.quantity === picked) ?? rungs[Math.min(1, rungs.length - 1)];
 }

@@ -13,11 +13,19 @@ export function QuoteTicket({ quote, actions }: { quote: Quote; actions?: ReactN
       level={1}
       number={quote.number}
       title={quote.customerName}
-      detail={quote.title === quote.patternName ? quote.title : `${quote.title} · pattern ${quote.patternName}`}
+      detail={
+        quote.title === quote.patternName
+          ? quote.title
+          : `${quote.title} · pattern ${quote.patternName}`
+      }
       facts={
         <>
-          {quote.inHandsOn && <TicketFact word="in hands">{dayText(quote.inHandsOn, today)}</TicketFact>}
-          {quote.validUntil && <TicketFact word="good until">{dayText(quote.validUntil, today)}</TicketFact>}
+          {quote.inHandsOn && (
+            <TicketFact word="in hands">{dayText(quote.inHandsOn, today)}</TicketFact>
+          )}
+          {quote.validUntil && (
+            <TicketFact word="good until">{dayText(quote.validUntil, today)}</TicketFact>
+          )}
           <TicketFact word="state">
             <StateMark state={quote.state}>{wordFor(quote)}</StateMark>
           </TicketFact>

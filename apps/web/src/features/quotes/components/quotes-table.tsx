@@ -76,7 +76,8 @@ function columnsFor(today: string): Column<QuoteRow>[] {
   ];
 }
 
-const nameOf = (row: QuoteRow) => (row.revision === 1 ? row.number : `${row.number}, revision ${row.revision}`);
+const nameOf = (row: QuoteRow) =>
+  row.revision === 1 ? row.number : `${row.number}, revision ${row.revision}`;
 
 /** What was agreed, or the range that is offered. */
 function piecesOf({ agreedQuantity, quantities }: QuoteRow): string {

@@ -35,7 +35,12 @@ export function RungFields({ workedOut }: RungFieldsProps) {
         <Button
           tone="quiet"
           className="mt-2 -ml-3"
-          onClick={() => append({ quantity: '', typedPrice: null }, { focusName: `breaks.${fields.length}.quantity` })}
+          onClick={() =>
+            append(
+              { quantity: '', typedPrice: null },
+              { focusName: `breaks.${fields.length}.quantity` },
+            )
+          }
         >
           <Plus size={18} aria-hidden="true" /> Another quantity
         </Button>
@@ -54,7 +59,12 @@ function RungRow({ at, workedOut, onRemove }: RungRowProps) {
     <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
       <NumberField name={`breaks.${at}.quantity`} label="Pieces" />
       <div>
-        <MoneyField name={`breaks.${at}.typedPrice`} label="Your price each" optional whenEmpty="null" />
+        <MoneyField
+          name={`breaks.${at}.typedPrice`}
+          label="Your price each"
+          optional
+          whenEmpty="null"
+        />
         <WorkedOutPrice at={at} workedOut={workedOut} />
       </div>
       {onRemove && (
@@ -73,7 +83,8 @@ function RungRow({ at, workedOut, onRemove }: RungRowProps) {
 
 function WorkedOutPrice({ at, workedOut }: { at: number; workedOut: ReadonlyMap<number, string> }) {
   const { setValue } = useFormContext();
-  const rung = useWatch({ name: `breaks.${at}` }) as { quantity: unknown; typedPrice: unknown } | undefined;
+  const rung = useWatch({ name: `breaks.${at}` }) as
+    { quantity: unknown; typedPrice: unknown } | undefined;
   const price = workedOut.get(Number(rung?.quantity));
   if (price === undefined) return null;
   const typed = typeof rung?.typedPrice === 'string' && rung.typedPrice !== '';
@@ -84,7 +95,9 @@ function WorkedOutPrice({ at, workedOut }: { at: number; workedOut: ReadonlyMap<
         <button
           type="button"
           className="min-h-8 rounded px-1 font-semibold text-verdigris underline underline-offset-3"
-          onClick={() => setValue(`breaks.${at}.typedPrice`, null, { shouldDirty: true, shouldValidate: false })}
+          onClick={() =>
+            setValue(`breaks.${at}.typedPrice`, null, { shouldDirty: true, shouldValidate: false })
+          }
         >
           Use it
         </button>

@@ -39,7 +39,9 @@ export function SendDialog({ quote, open, onOpenChange }: SendDialogProps) {
       say(`Quote ${quote.number} is on its way to ${quote.customerEmail ?? quote.customerName}.`);
       onOpenChange(false);
     } catch (error) {
-      setProblem(error instanceof ApiProblem ? error.detail : 'That did not work. Try again in a moment.');
+      setProblem(
+        error instanceof ApiProblem ? error.detail : 'That did not work. Try again in a moment.',
+      );
     }
   }
 
@@ -49,7 +51,11 @@ export function SendDialog({ quote, open, onOpenChange }: SendDialogProps) {
   }
 
   return (
-    <Dialog open={open} onOpenChange={close} title={handed ? `Pass on quote ${quote.number}` : titleFor(quote)}>
+    <Dialog
+      open={open}
+      onOpenChange={close}
+      title={handed ? `Pass on quote ${quote.number}` : titleFor(quote)}
+    >
       {problem && (
         <Notice tone="danger" live className="mb-4">
           {problem}
@@ -90,7 +96,9 @@ function Ways({ quote, busy, onGo }: { quote: Quote; busy: boolean; onGo: (by: B
         <Button tone={byMail ? 'secondary' : 'primary'} busy={busy} onClick={() => onGo('hand')}>
           Send by hand
         </Button>
-        <p className="mt-1 text-sm text-ink-soft">You get the link, the text and the paper to pass on yourself.</p>
+        <p className="mt-1 text-sm text-ink-soft">
+          You get the link, the text and the paper to pass on yourself.
+        </p>
       </div>
     </div>
   );

@@ -14,7 +14,11 @@ interface ToolingFieldsProps {
 /** Tools that the run needs made: what they cost the shop, and what the customer is charged, once. */
 export function ToolingFields({ suggestions }: ToolingFieldsProps) {
   const { fields, append, remove } = useFieldArray({ name: 'tooling' });
-  const add = (name: string) => append({ name, cost: '', charge: '' }, { focusName: `tooling.${fields.length}.${name === '' ? 'name' : 'cost'}` });
+  const add = (name: string) =>
+    append(
+      { name, cost: '', charge: '' },
+      { focusName: `tooling.${fields.length}.${name === '' ? 'name' : 'cost'}` },
+    );
   return (
     <fieldset>
       <legend className="mb-1 text-lg font-semibold">Tooling</legend>

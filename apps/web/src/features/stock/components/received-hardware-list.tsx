@@ -1,6 +1,6 @@
 import type { PurchaseLine } from '@hidewright/contract';
 import { Plus } from 'lucide-react';
-import { useFieldArray, useWatch } from 'react-hook-form';
+import { useFieldArray } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
@@ -16,13 +16,14 @@ interface ReceivedHardwareListProps {
 
 /** The hardware and supplies that came, counted; of an order, what is still to come stands there already. */
 export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHardwareListProps) {
-  const { fields, append, remove } = useFieldArray({ name: 'hardware' });
-  const typed = (useWatch({ name: 'hardware' }) ?? []) as TypedHardware[];
+  const { fields, append, remove } = useFieldArray<{ hardware: TypedHardware[] }>({
+    name: 'hardware',
+  });
   const left = lines.filter(
     (line) =>
       line.of === 'hardware' &&
       isOpen(line) &&
-      !typed.some((row) => row.purchaseLineId === line.id),
+      !fields.some((row) => row.purchaseLineId === line.id),
   );
   return (
     <fieldset>
@@ -32,7 +33,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
           <ReceivedHardware
             key={field.id}
             at={at}
-            line={lines.find(({ id }) => id === typed[at]?.purchaseLineId)}
+            line={lines.find(({ id }) => id === field.purchaseLineId)}
             hardware={hardware}
             mayPrice={mayPrice}
             onRemove={() => remove(at)}

@@ -1,6 +1,6 @@
 import type { PurchaseLine } from '@hidewright/contract';
 import { Plus } from 'lucide-react';
-import { useFieldArray, useWatch } from 'react-hook-form';
+import { useFieldArray } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
 import { areaText } from '../../../lib/formatting.ts';
@@ -16,9 +16,8 @@ interface ReceivedLotListProps {
 
 /** The lots that came, each a card; of an order, one press adds another lot of the same leather. */
 export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListProps) {
-  const { fields, append, remove } = useFieldArray({ name: 'lots' });
+  const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
   const { areaUnit } = useWorkshop();
-  const lots = (useWatch({ name: 'lots' }) ?? []) as TypedLot[];
   const open = lines.filter((line) => line.of === 'leather' && isOpen(line));
   const add = (lot: TypedLot) =>
     append(lot, { focusName: `lots.${fields.length}.measuredAreaMm2` });
@@ -33,7 +32,7 @@ export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListPr
       <legend className="mb-3 text-lg font-semibold">Leather</legend>
       <div className="space-y-4">
         {fields.map((field, at) => {
-          const line = lines.find(({ id }) => id === lots[at]?.purchaseLineId);
+          const line = lines.find(({ id }) => id === field.purchaseLineId);
           return (
             <ReceivedLot
               key={field.id}
