@@ -13,7 +13,7 @@ const rooms = [
   ['domain', 'packages/domain/**'],
   ['contract', 'packages/contract/**'],
   ['api-test', ['apps/api/**/*.test.ts', 'apps/api/src/testing/**', 'apps/api/*.config.ts']],
-  ['api-launch', 'apps/api/src/{server,verify,backup,restore,index}.ts'],
+  ['api-launch', 'apps/api/src/{server,verify,backup,restore}.ts'],
   ['api-app', 'apps/api/src/app.ts'],
   ['api-routes', 'apps/api/src/modules/*/*.routes.ts', ['module']],
   ['api-repository', 'apps/api/src/modules/*/*.repository.ts', ['module']],

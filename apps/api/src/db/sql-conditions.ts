@@ -1,5 +1,5 @@
 /** One condition of a query written by hand; what a person typed goes into `values`, never into `sql`. */
-export interface Condition {
+interface Condition {
   sql: string;
   values: readonly (string | number | null)[];
 }

@@ -8,7 +8,7 @@ import { Workshop } from '../workshop/workshop.entity.ts';
 import { sayArea } from './say-area.ts';
 import type { StockItem } from './stock-item.ts';
 
-export interface DescribedItem {
+interface DescribedItem {
   /** As people name it: "lot T-0012", "Copper rivet 9 mm". */
   name: string;
   /** What one unit of the ledger cost when it was bought, in whole currency units. */

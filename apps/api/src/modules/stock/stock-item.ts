@@ -4,7 +4,7 @@ export type StockItem =
   | { readonly hardwareId: number; readonly lotId?: null };
 
 /** An item as the ledger's tables name it: one of the two columns, the other empty. */
-export interface ItemKeys {
+interface ItemKeys {
   lotId: number | null;
   hardwareId: number | null;
 }

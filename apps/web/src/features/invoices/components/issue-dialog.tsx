@@ -1,5 +1,6 @@
 import { issueInvoice, readInvoice, type Invoice } from '@hidewright/contract';
 import { useQueryClient } from '@tanstack/react-query';
+import { useRevalidator } from 'react-router-dom';
 import { DayField } from '../../../components/day-field.tsx';
 import { Dialog } from '../../../components/dialog.tsx';
 import { Form } from '../../../components/form.tsx';
@@ -20,6 +21,7 @@ export function IssueDialog({ invoice, open, onOpenChange }: IssueDialogProps) {
   const { today } = useWorkshop();
   const send = useIssueInvoice();
   const client = useQueryClient();
+  const { revalidate } = useRevalidator();
   const { id, currency, customerName } = invoice;
   const { queryKey } = invoiceQuery(id);
   const defaults = { issuedOn: today };
@@ -45,6 +47,8 @@ export function IssueDialog({ invoice, open, onOpenChange }: IssueDialogProps) {
           const ifMatch = client.getQueryData(queryKey)?.version ?? invoice.version;
           const issued = await send.mutateAsync({ params: { id }, body, ifMatch });
           onOpenChange(false);
+          // The way back at the top of the page names it by its number from now on.
+          void revalidate();
           say(`Invoice ${issued.number ?? ''} is issued.`);
         }}
       >

@@ -57,8 +57,10 @@ interface RungRowProps extends RungFieldsProps {
 function RungRow({ at, workedOut, onRemove }: RungRowProps) {
   return (
     <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
-      <NumberField name={`breaks.${at}.quantity`} label="Pieces" />
-      <div>
+      <div className="w-44">
+        <NumberField name={`breaks.${at}.quantity`} label="Pieces" />
+      </div>
+      <div className="w-44">
         <MoneyField
           name={`breaks.${at}.typedPrice`}
           label="Your price each"

@@ -31,8 +31,12 @@ export function ToolingFields({ suggestions }: ToolingFieldsProps) {
             <div className="w-full">
               <TextField name={`tooling.${at}.name`} label="Tool" />
             </div>
-            <MoneyField name={`tooling.${at}.cost`} label="Costs the shop" />
-            <MoneyField name={`tooling.${at}.charge`} label="Charged" />
+            <div className="w-44">
+              <MoneyField name={`tooling.${at}.cost`} label="Costs the shop" />
+            </div>
+            <div className="w-44">
+              <MoneyField name={`tooling.${at}.charge`} label="Charged" />
+            </div>
             <button
               type="button"
               onClick={() => remove(at)}
