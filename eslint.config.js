@@ -227,7 +227,7 @@ const typed = {
     '@typescript-eslint/no-namespace': ['error', { allowDeclarations: true }],
     '@typescript-eslint/no-unused-vars': [
       'error',
-      { argsIgnorePattern: '^_', varsIgnorePattern: '^_$' },
+      { argsIgnorePattern: '^_', varsIgnorePattern: '^_', ignoreRestSiblings: true },
     ],
   },
 };
@@ -271,9 +271,18 @@ const web = {
 };
 
 const nodeGlobals = Object.fromEntries(
-  ['process', 'console', 'Buffer', 'URL', 'performance', 'setTimeout', 'clearTimeout', 'fetch'].map(
-    (name) => [name, 'readonly'],
-  ),
+  [
+    'process',
+    'console',
+    'Buffer',
+    'URL',
+    'performance',
+    'setTimeout',
+    'clearTimeout',
+    'setInterval',
+    'clearInterval',
+    'fetch',
+  ].map((name) => [name, 'readonly']),
 );
 
 export default typescript.config(

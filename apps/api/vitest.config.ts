@@ -12,7 +12,9 @@ const entities: Plugin = {
       sourcefile: id,
       sourcemap: true,
       target: 'es2022',
-      tsconfigRaw: { compilerOptions: { experimentalDecorators: true, useDefineForClassFields: false } },
+      tsconfigRaw: {
+        compilerOptions: { experimentalDecorators: true, useDefineForClassFields: false },
+      },
     });
   },
 };

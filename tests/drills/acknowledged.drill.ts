@@ -22,17 +22,30 @@ const owner = {
 };
 
 async function cookieFrom(url: string, path: string, body: object): Promise<string> {
-  const reply = await fetch(`${url}/api${path}`, { method: 'POST', headers: { 'Content-Type': 'application/json' }, body: JSON.stringify(body) });
+  const reply = await fetch(`${url}/api${path}`, {
+    method: 'POST',
+    headers: { 'Content-Type': 'application/json' },
+    body: JSON.stringify(body),
+  });
   expect(reply.ok, `${path} answered ${reply.status}`).toBe(true);
   return reply.headers.get('set-cookie')?.split(';')[0] ?? '';
 }
 
 /** Adds leathers from several sides until the server dies, and keeps the names it acknowledged. */
-async function writeUntilDeath(url: string, cookie: string, prefix: string, acknowledged: string[]): Promise<void> {
+async function writeUntilDeath(
+  url: string,
+  cookie: string,
+  prefix: string,
+  acknowledged: string[],
+): Promise<void> {
   const write = async (writer: number) => {
     for (let at = 0; ; at += 1) {
       const name = `${prefix}-${writer}-${at}`;
-      const headers = { 'Content-Type': 'application/json', Cookie: cookie, 'Idempotency-Key': name };
+      const headers = {
+        'Content-Type': 'application/json',
+        Cookie: cookie,
+        'Idempotency-Key': name,
+      };
       const body = JSON.stringify({ name, pricePerFt2: '9.50' });
       try {
         const reply = await fetch(`${url}/api/leathers`, { method: 'POST', headers, body });
@@ -47,8 +60,11 @@ async function writeUntilDeath(url: string, cookie: string, prefix: string, ackn
 
 async function keptNames(url: string, cookie: string): Promise<string[]> {
   const names: string[] = [];
-  for (let cursor: string | null = ''; cursor !== null; ) {
-    const reply: Response = await fetch(`${url}/api/leathers?limit=200${cursor && `&cursor=${cursor}`}`, { headers: { Cookie: cookie } });
+  for (let cursor: string | null = ''; cursor !== null;) {
+    const reply: Response = await fetch(
+      `${url}/api/leathers?limit=200${cursor && `&cursor=${cursor}`}`,
+      { headers: { Cookie: cookie } },
+    );
     const page = (await reply.json()) as { items: { name: string }[]; next: string | null };
     names.push(...page.items.map((item) => item.name));
     cursor = page.next;
@@ -57,7 +73,11 @@ async function keptNames(url: string, cookie: string): Promise<string[]> {
 }
 
 /** Kills the server in the middle of its work, again and again; gives what it acknowledged and what it then had. */
-async function drill(dataDir: string, times: number, planted?: string): Promise<{ acknowledged: string[]; kept: string[] }> {
+async function drill(
+  dataDir: string,
+  times: number,
+  planted?: string,
+): Promise<{ acknowledged: string[]; kept: string[] }> {
   const acknowledged: string[] = [];
   for (let round = 0; round < times; round += 1) {
     const server = await startServer(dataDir, planted);
@@ -68,12 +88,17 @@ async function drill(dataDir: string, times: number, planted?: string): Promise<
     await new Promise((resolve) => setTimeout(resolve, 1000));
     const before = acknowledged.length;
     const dead = writeUntilDeath(server.url, cookie, `round-${round}`, acknowledged);
-    await expect.poll(() => acknowledged.length - before, { timeout: 60_000, interval: 5 }).toBeGreaterThan(5 + 3 * round);
+    await expect
+      .poll(() => acknowledged.length - before, { timeout: 60_000, interval: 5 })
+      .toBeGreaterThan(5 + 3 * round);
     await server.kill();
     await dead;
   }
   const server = await startServer(dataDir);
-  const kept = await keptNames(server.url, await cookieFrom(server.url, '/session', { email: owner.email, password: owner.password }));
+  const kept = await keptNames(
+    server.url,
+    await cookieFrom(server.url, '/session', { email: owner.email, password: owner.password }),
+  );
   await server.kill();
   return { acknowledged, kept };
 }

@@ -12,10 +12,19 @@ interface Server {
 
 /** The API alone, as a process that can be killed; a planted defect is loaded before it. */
 export async function startServer(dataDir: string, planted?: string): Promise<Server> {
-  const preload = planted === undefined ? [] : ['--import', path.join(import.meta.dirname, 'planted', planted)];
+  const preload =
+    planted === undefined ? [] : ['--import', path.join(import.meta.dirname, 'planted', planted)];
   const child = spawn(process.execPath, ['--import', 'tsx', ...preload, 'src/server.ts'], {
     cwd: api,
-    env: { ...process.env, MODE: 'shop', DATA_DIR: dataDir, PORT: '0', HOST: '127.0.0.1', SMTP_URL: '', LOG_LEVEL: 'info' },
+    env: {
+      ...process.env,
+      MODE: 'shop',
+      DATA_DIR: dataDir,
+      PORT: '0',
+      HOST: '127.0.0.1',
+      SMTP_URL: '',
+      LOG_LEVEL: 'info',
+    },
     stdio: ['ignore', 'pipe', 'inherit'],
   });
   const url = `http://127.0.0.1:${await portOf(child)}`;

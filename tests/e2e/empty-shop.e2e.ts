@@ -50,10 +50,15 @@ walk('from an empty shop to a sent quote of an own piece', async ({ page }) => {
   const customer = page.getByRole('dialog');
   await customer.getByLabel('Name', { exact: true }).fill('The first customer');
   await customer.getByRole('button', { name: /Add/ }).click();
-  await expect.poll(() => page.getByLabel('Customer', { exact: true }).inputValue()).not.toBe('');
+  await expect
+    .poll(() => page.getByLabel('Customer', { exact: true }).inputValue(), { timeout: 30_000 })
+    .not.toBe('');
   await page.getByLabel('Pattern', { exact: true }).selectOption({ label: 'Key fob' });
   await page.getByLabel('Pieces').first().fill('20');
-  await page.getByLabel(/Your price each/).first().fill('4');
+  await page
+    .getByLabel(/Your price each/)
+    .first()
+    .fill('4');
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Save the draft' }).click();
   await page.waitForURL(/\/counter\/quotes\/\d+$/);

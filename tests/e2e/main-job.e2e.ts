@@ -1,6 +1,14 @@
 import { afterAll, beforeAll, expect } from 'vitest';
 import type { Page } from 'playwright-core';
-import { browser, closeBrowser, expectAccessible, phone, walk, watch, wide } from '../support/browser.ts';
+import {
+  browser,
+  closeBrowser,
+  expectAccessible,
+  phone,
+  walk,
+  watch,
+  wide,
+} from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
 import { mailThat } from '../support/mailbox.ts';
 import { idIn, settled, signInAs, visit, type Role } from '../support/steps.ts';
@@ -36,9 +44,9 @@ async function leave(page: Page): Promise<void> {
 walk('one run of coasters, from the enquiry to the locked sales sheet', async () => {
   const { quoteAddress, number } = await ownerQuotes();
   await customerAgrees(number);
-  const jobAddress = await ownerTakesOn(quoteAddress);
+  const { orderAddress, jobAddress } = await ownerTakesOn(quoteAddress);
   await makerWorks(jobAddress);
-  const orderNumber = await ownerShips(jobAddress);
+  const orderNumber = await ownerShips(jobAddress, orderAddress);
   const invoiceNumber = await bookkeeperInvoices(orderNumber);
   await bookkeeperLocks(invoiceNumber);
 });
@@ -48,7 +56,9 @@ async function ownerQuotes(): Promise<{ quoteAddress: string; number: string }> 
   await expectAccessible(page);
   await visit(page, `${hidewright.url}/counter/quotes/new`);
   await page.getByLabel('Customer', { exact: true }).selectOption({ label: 'Brambling Brewery' });
-  await page.getByLabel('Pattern', { exact: true }).selectOption({ label: 'Drinks coaster, round' });
+  await page
+    .getByLabel('Pattern', { exact: true })
+    .selectOption({ label: 'Drinks coaster, round' });
   await page.getByLabel(/What the customer calls it/).fill('Spring ale coasters');
   await page.getByLabel(/^In hands/).fill(daysFromNow(42));
   await page.getByLabel('Pieces').first().fill(String(quantity));
@@ -85,7 +95,9 @@ async function customerAgrees(number: string): Promise<void> {
   await leave(page);
 }
 
-async function ownerTakesOn(quoteAddress: string): Promise<string> {
+async function ownerTakesOn(
+  quoteAddress: string,
+): Promise<{ orderAddress: string; jobAddress: string }> {
   const page = await desk('owner');
   await visit(page, quoteAddress);
   await page.getByRole('heading', { name: 'Can we make it?' }).waitFor();
@@ -94,12 +106,13 @@ async function ownerTakesOn(quoteAddress: string): Promise<string> {
   await page.waitForURL(/\/counter\/orders\/\d+$/);
   await settled(page);
   await expectAccessible(page);
-  await page.getByRole('link', { name: /^J-\d+/ }).first().click();
+  const orderAddress = page.url();
+  await page.getByRole('link', { name: 'Open the ticket' }).click();
   await page.waitForURL(/\/bench\/jobs\/\d+$/);
   const jobAddress = page.url();
   expect(idIn(jobAddress)).toBeGreaterThan(0);
   await leave(page);
-  return jobAddress;
+  return { orderAddress, jobAddress };
 }
 
 async function makerWorks(jobAddress: string): Promise<void> {
@@ -107,10 +120,10 @@ async function makerWorks(jobAddress: string): Promise<void> {
   await expectAccessible(page);
   await visit(page, `${hidewright.url}/bench`);
   await visit(page, jobAddress);
-  for (let held = page.getByRole('button', { name: /^Take [\d.,]+/ }); (await held.count()) > 0; ) {
+  for (let held = page.getByRole('button', { name: /^Take [\d.,]+/ }); (await held.count()) > 0;) {
     const before = await held.count();
     await held.first().click();
-    await expect.poll(() => held.count()).toBeLessThan(before);
+    await expect.poll(() => held.count(), { timeout: 30_000 }).toBeLessThan(before);
   }
   await workEveryStep(page);
   await expectAccessible(page);
@@ -134,18 +147,20 @@ async function workEveryStep(page: Page): Promise<void> {
     if ((await all.count()) > 0) await all.last().click();
     else await steps.nth(at).getByRole('button', { name: 'One good piece more' }).click();
     await steps.nth(at).getByRole('button', { name: /\+ ?5/ }).first().click();
+    const logged = page.waitForResponse((reply) => reply.url().endsWith('/logs'));
     await steps.nth(at).getByRole('button', { name: /^Log / }).click();
-    await expect.poll(() => steps.nth(at).getByRole('button', { name: /^Log / }).count()).toBe(0);
+    expect((await logged).status()).toBe(201);
+    await expect
+      .poll(() => steps.nth(at).getByRole('button', { name: /^Log / }).count(), { timeout: 30_000 })
+      .toBe(0);
   }
 }
 
-async function ownerShips(jobAddress: string): Promise<string> {
+async function ownerShips(jobAddress: string, orderAddress: string): Promise<string> {
   const page = await desk('owner');
   await visit(page, jobAddress);
   await page.getByRole('heading', { name: 'Estimate and fact' }).waitFor();
-  await page.getByRole('link', { name: /^O-\d+/ }).first().click();
-  await page.waitForURL(/\/counter\/orders\/\d+$/);
-  await settled(page);
+  await visit(page, orderAddress);
   await page.getByRole('button', { name: 'It has left the shop' }).click();
   await page.getByText('shipped').first().waitFor();
   await expectAccessible(page);
@@ -171,7 +186,10 @@ async function bookkeeperInvoices(orderNumber: string): Promise<string> {
   await page.waitForURL(/\/books\/invoices\/\d+$/);
   await page.getByRole('button', { name: /^Issue/ }).click();
   await page.getByRole('dialog').getByRole('button', { name: 'Issue the invoice' }).click();
-  await page.getByText(/^I-\d+$/).first().waitFor();
+  await page
+    .getByText(/^I-\d+$/)
+    .first()
+    .waitFor();
   await settled(page);
   await expectAccessible(page);
   const number = /I-\d+/.exec(await page.getByRole('main').innerText())?.[0] ?? '';
@@ -189,7 +207,10 @@ async function bookkeeperLocks(invoiceNumber: string): Promise<void> {
   await visit(page, `${hidewright.url}/books/sales-sheets?from=${today.slice(0, 8)}01&to=${today}`);
   await page.getByText(invoiceNumber).first().waitFor();
   const download = page.waitForEvent('download');
-  await page.getByRole('link', { name: /spreadsheet|\.xlsx|Download/i }).first().click();
+  await page
+    .getByRole('link', { name: /spreadsheet|\.xlsx|Download/i })
+    .first()
+    .click();
   expect((await download).suggestedFilename()).toMatch(/\.xlsx$/);
   await page.getByRole('button', { name: 'Lock these days' }).click();
   await expectAccessible(page);

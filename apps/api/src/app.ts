@@ -75,7 +75,13 @@ export async function createApp(context: Context): Promise<Express> {
   app.use(pinoHttp({ logger: context.log, serializers: { req: withoutTokens, res: onlyStatus } }));
   app.use(helmet(headers(context)));
   app.use(compression());
-  app.use('/api', noStore, sameOrigin(context.config), express.json({ limit: '1mb' }), ...middleware);
+  app.use(
+    '/api',
+    noStore,
+    sameOrigin(context.config),
+    express.json({ limit: '1mb' }),
+    ...middleware,
+  );
   app.use('/api', sessionRoutes(context, authenticate), ...rooms.map((room) => room(context)));
   app.use('/api', () => {
     throw notFound('address');
@@ -134,7 +140,10 @@ async function serveWeb(app: Express): Promise<void> {
 }
 
 /** Built files carry a hash in their names. */
-function cacheForever(response: { setHeader(name: string, value: string): void }, file: string): void {
+function cacheForever(
+  response: { setHeader(name: string, value: string): void },
+  file: string,
+): void {
   if (file.includes(`${path.sep}assets${path.sep}`)) {
     response.setHeader('Cache-Control', 'public, max-age=31536000, immutable');
   }

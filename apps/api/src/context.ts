@@ -39,7 +39,10 @@ export async function createContext(
     config,
     orm,
     clock,
-    log: pino({ level: config.logLevel, redact: ['req.headers.cookie', 'res.headers["set-cookie"]'] }),
+    log: pino({
+      level: config.logLevel,
+      redact: ['req.headers.cookie', 'res.headers["set-cookie"]'],
+    }),
     mailer: connectMail(config),
     files: new FileStore(path.join(config.dataDir, 'files')),
     papers,
@@ -53,7 +56,9 @@ async function assertMode(orm: MikroORM, { mode, dataDir }: Config): Promise<voi
   if (workshop === null || workshop.mode === mode) return;
   await orm.close(true);
   const other = workshop.mode === 'demo' ? 'the demo workshop' : 'a real shop';
-  throw new Error(`${dataDir} holds ${other}. Start it as that, or set DATA_DIR to another folder.`);
+  throw new Error(
+    `${dataDir} holds ${other}. Start it as that, or set DATA_DIR to another folder.`,
+  );
 }
 
 export async function closeContext(context: Context): Promise<void> {

@@ -18,7 +18,13 @@ export function ormConfig(file: string, synchronous: 'FULL' | 'OFF' = 'FULL'): O
     metadataCache: { adapter: FileCacheAdapter, options: { cacheDir } },
     pool: writePool(synchronous),
     extensions: [Migrator],
-    migrations: { migrationsList: migrations, snapshot: false, silent: true, tableName: 'migration', transactional: true },
+    migrations: {
+      migrationsList: migrations,
+      snapshot: false,
+      silent: true,
+      tableName: 'migration',
+      transactional: true,
+    },
     forceUndefined: false,
     validate: true,
   });

@@ -13,11 +13,17 @@ async function start(): Promise<void> {
   const server = await listen(await createApp(context), config);
   const background = [startOutbox(context), startLapsing(context)];
   context.log.info({ port: server.port, host: config.host, mode: config.mode }, 'listening');
-  for (const signal of ['SIGINT', 'SIGTERM'] as const) {
-    process.once(signal, () => {
-      void Promise.all([server.close(), ...background.map((each) => each.stop())]).then(() => closeContext(context));
-    });
-  }
+  let ending: Promise<void> | undefined;
+  const end = () => {
+    ending ??= Promise.all([server.close(), ...background.map((each) => each.stop())])
+      .then(() => closeContext(context))
+      .then(() => {
+        if (process.connected) process.disconnect();
+      });
+  };
+  for (const signal of ['SIGINT', 'SIGTERM'] as const) process.on(signal, end);
+  // The launcher holds the other end: when it is gone, nobody else would end this.
+  process.on('disconnect', end);
 }
 
 start().catch((error: unknown) => {

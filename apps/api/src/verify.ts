@@ -7,7 +7,9 @@ import { verifyFolder } from './verify/verify-folder.ts';
 async function main(): Promise<number> {
   const given = process.argv[2];
   if (given === undefined || !existsSync(databaseFile(path.resolve(given)))) {
-    process.stderr.write('Name a data folder that holds hidewright.sqlite, such as: npm run verify -- data\n');
+    process.stderr.write(
+      'Name a data folder that holds hidewright.sqlite, such as: npm run verify -- data\n',
+    );
     return 2;
   }
   const results = await verifyFolder(path.resolve(given));
@@ -16,7 +18,9 @@ async function main(): Promise<number> {
     for (const fault of faults.slice(0, 20)) process.stdout.write(`        ${fault}\n`);
   }
   const broken = results.filter((result) => result.faults.length > 0).length;
-  process.stdout.write(broken === 0 ? 'Everything holds.\n' : `${broken} of ${results.length} do not hold.\n`);
+  process.stdout.write(
+    broken === 0 ? 'Everything holds.\n' : `${broken} of ${results.length} do not hold.\n`,
+  );
   return broken === 0 ? 0 : 1;
 }
 

@@ -1,6 +1,6 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { Context } from './context.ts';
-import { dayIn } from './outside/clock.ts';
+import { dayIn } from './day-in.ts';
 import { Workshop } from './modules/workshop/workshop.entity.ts';
 
 /** Who does something: a person who is signed in, a customer by a link, or the program itself. */
@@ -28,11 +28,17 @@ export async function inTransaction<T>(
   actor: Actor,
   useCase: (work: Work) => Promise<T>,
 ): Promise<T> {
-  return context.orm.em.fork().transactional(async (em) => useCase(await workOn(context, em, actor)));
+  return context.orm.em
+    .fork()
+    .transactional(async (em) => useCase(await workOn(context, em, actor)));
 }
 
 /** A use case that only reads, on its own identity map. */
-export async function reading<T>(context: Context, actor: Actor, useCase: (work: Work) => Promise<T>): Promise<T> {
+export async function reading<T>(
+  context: Context,
+  actor: Actor,
+  useCase: (work: Work) => Promise<T>,
+): Promise<T> {
   return useCase(await workOn(context, context.orm.em.fork(), actor));
 }
 

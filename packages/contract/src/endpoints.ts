@@ -54,7 +54,13 @@ const rooms: Record<string, unknown>[] = [
 ];
 
 const isEndpoint = (value: unknown): value is Endpoint =>
-  typeof value === 'object' && value !== null && 'method' in value && 'path' in value && 'access' in value;
+  typeof value === 'object' &&
+  value !== null &&
+  'method' in value &&
+  'path' in value &&
+  'access' in value;
 
 /** Everything the API does. A room's file is named here once; its endpoints are then served, documented and tested. */
-export const endpoints: readonly Endpoint[] = rooms.flatMap((room) => Object.values(room).filter(isEndpoint));
+export const endpoints: readonly Endpoint[] = rooms.flatMap((room) =>
+  Object.values(room).filter(isEndpoint),
+);

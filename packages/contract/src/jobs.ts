@@ -12,7 +12,6 @@ import {
   pageQuery,
   paperNumber,
   positiveCount,
-  version,
 } from './fields.ts';
 import { job, jobState } from './job-ticket.ts';
 import { awaited } from './orders.ts';

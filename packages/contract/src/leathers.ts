@@ -1,7 +1,17 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { id, idParams, line, optionalLine, ounces, page, pageQuery, unitPrice, version } from './fields.ts';
+import {
+  id,
+  idParams,
+  line,
+  optionalLine,
+  ounces,
+  page,
+  pageQuery,
+  unitPrice,
+  version,
+} from './fields.ts';
 
 const typed = {
   name: line(80, 'Enter a name, such as Oak tan russet 5–6 oz.'),

@@ -6,7 +6,20 @@ import { role } from './session.ts';
 
 /** One thing that waits for this person. */
 const toDo = z.object({
-  kind: z.enum(['answer', 'take on', 'clear', 'make', 'check', 'order', 'receive', 'ship', 'invoice', 'remind', 'lock', 'start']),
+  kind: z.enum([
+    'answer',
+    'take on',
+    'clear',
+    'make',
+    'check',
+    'order',
+    'receive',
+    'ship',
+    'invoice',
+    'remind',
+    'lock',
+    'start',
+  ]),
   title: z.string(),
   detail: z.string(),
   /** The day it hangs on, and what that day is: in hands, promised for, was due. */
@@ -62,7 +75,11 @@ export const today = z
       })
       .nullable(),
     owed: confidential(
-      z.array(z.object({ age: z.enum(['not due', '1–30 days', '31–60', 'older']), amount: z.string() })).nullable(),
+      z
+        .array(
+          z.object({ age: z.enum(['not due', '1–30 days', '31–60', 'older']), amount: z.string() }),
+        )
+        .nullable(),
     ),
     earned: confidential(z.object({ target: z.string(), jobs: z.array(earnedHour) }).nullable()),
     short: z.array(shortItem).nullable(),

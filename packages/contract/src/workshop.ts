@@ -1,7 +1,16 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { count, lengthMm, line, money, optionalLine, paragraph, percent, version } from './fields.ts';
+import {
+  count,
+  lengthMm,
+  line,
+  money,
+  optionalLine,
+  paragraph,
+  percent,
+  version,
+} from './fields.ts';
 
 const hoursPerDay = z
   .string()

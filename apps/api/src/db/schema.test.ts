@@ -19,9 +19,17 @@ const query = <Row>(sql: string) => shop.context.orm.em.getConnection().execute<
 describe('the schema', () => {
   it('is what the entities mean: every column, its type and whether it may be empty', async () => {
     for (const meta of Object.values(shop.context.orm.getMetadata().getAll())) {
-      const columns = await query<{ name: string; type: string; notnull: number; pk: number }>(`PRAGMA table_info(${meta.tableName})`);
-      const there = columns.map(({ name, type, notnull, pk }) => `${name} ${type.toLowerCase()} ${notnull === 1 || pk > 0 ? 'set' : 'empty'}`);
-      const meant = meta.props.map((prop) => `${prop.fieldNames[0]} ${prop.columnTypes[0]} ${prop.nullable === true ? 'empty' : 'set'}`);
+      const columns = await query<{ name: string; type: string; notnull: number; pk: number }>(
+        `PRAGMA table_info(${meta.tableName})`,
+      );
+      const there = columns.map(
+        ({ name, type, notnull, pk }) =>
+          `${name} ${type.toLowerCase()} ${notnull === 1 || pk > 0 ? 'set' : 'empty'}`,
+      );
+      const meant = meta.props.map(
+        (prop) =>
+          `${prop.fieldNames[0]} ${prop.columnTypes[0]} ${prop.nullable === true ? 'empty' : 'set'}`,
+      );
       expect([meta.tableName, ...there.sort()]).toEqual([meta.tableName, ...meant.sort()]);
     }
   });
@@ -30,29 +38,43 @@ describe('the schema', () => {
     const tables = await query<{ name: string; strict: number }>(
       `SELECT name, strict FROM pragma_table_list WHERE schema = 'main' AND type = 'table' AND name NOT LIKE 'sqlite_%' AND name <> 'migration'`,
     );
-    const named = Object.values(shop.context.orm.getMetadata().getAll()).map((meta) => meta.tableName);
+    const named = Object.values(shop.context.orm.getMetadata().getAll()).map(
+      (meta) => meta.tableName,
+    );
     expect(tables.map((table) => table.name).sort()).toEqual(named.sort());
     expect(tables.filter((table) => table.strict !== 1)).toEqual([]);
   });
 
   it('names every migration of the folder', async () => {
     const folder = fileURLToPath(new URL('../migrations', import.meta.url));
-    const files = (await readdir(folder)).filter((file) => file.startsWith('migration-')).map((file) => file.replace('.ts', ''));
+    const files = (await readdir(folder))
+      .filter((file) => file.startsWith('migration-'))
+      .map((file) => file.replace('.ts', ''));
     expect(migrations.map((migration) => migration.name)).toEqual(files.sort());
   });
 
-  it.each(['stock_movement', 'payment', 'impression', 'posting', 'activity', 'bench_log', 'pattern_version', 'period'])(
-    'lets nobody change or delete a row of %s',
-    async (table) => {
-      const triggers = await query<{ name: string }>(`SELECT name FROM sqlite_master WHERE type = 'trigger' AND tbl_name = '${table}'`);
-      expect(triggers.map((trigger) => trigger.name)).toEqual(
-        expect.arrayContaining([`${table}_refuses_update`, `${table}_refuses_delete`]),
-      );
-    },
-  );
+  it.each([
+    'stock_movement',
+    'payment',
+    'impression',
+    'posting',
+    'activity',
+    'bench_log',
+    'pattern_version',
+    'period',
+  ])('lets nobody change or delete a row of %s', async (table) => {
+    const triggers = await query<{ name: string }>(
+      `SELECT name FROM sqlite_master WHERE type = 'trigger' AND tbl_name = '${table}'`,
+    );
+    expect(triggers.map((trigger) => trigger.name)).toEqual(
+      expect.arrayContaining([`${table}_refuses_update`, `${table}_refuses_delete`]),
+    );
+  });
 
   it('refuses a change to the log of who did what', async () => {
-    await expect(query(`UPDATE activity SET action = 'nothing' WHERE seq = 1`)).rejects.toThrow('append-only');
+    await expect(query(`UPDATE activity SET action = 'nothing' WHERE seq = 1`)).rejects.toThrow(
+      'append-only',
+    );
     await expect(query(`DELETE FROM activity WHERE seq = 1`)).rejects.toThrow('append-only');
   });
 

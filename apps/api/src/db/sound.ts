@@ -5,9 +5,13 @@ const oldestSafe = [3, 51, 3] as const;
 /** SQLite before 3.51.3 can corrupt a database in WAL mode (sqlite.org/wal.html), and without FULL it can lose what was acknowledged. */
 export async function assertSound(orm: MikroORM): Promise<void> {
   const connection = orm.em.getConnection();
-  const [row] = await connection.execute<[{ version: string }]>('SELECT sqlite_version() AS version');
+  const [row] = await connection.execute<[{ version: string }]>(
+    'SELECT sqlite_version() AS version',
+  );
   if (!atLeast(row.version, oldestSafe)) {
-    throw new Error(`Hidewright needs SQLite ${oldestSafe.join('.')} or later; this is ${row.version}. Reinstall.`);
+    throw new Error(
+      `Hidewright needs SQLite ${oldestSafe.join('.')} or later; this is ${row.version}. Reinstall.`,
+    );
   }
 }
 

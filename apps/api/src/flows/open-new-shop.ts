@@ -46,6 +46,10 @@ export async function openNewShop(work: Work, asked: NewShop): Promise<Person> {
     createdAt,
   });
   await work.em.flush();
-  await logDeed(work, { action: `opened ${asked.workshopName}`, subjectKind: 'workshop', subjectId: 1 });
+  await logDeed(work, {
+    action: `opened ${asked.workshopName}`,
+    subjectKind: 'workshop',
+    subjectId: 1,
+  });
   return owner;
 }

@@ -14,7 +14,7 @@ import { definitionOf } from '../modules/patterns/pattern-versions.ts';
 import type { Quote } from '../modules/quotes/quote.entity.ts';
 
 /** A step as the job will have it. */
-export interface PlannedStep {
+interface PlannedStep {
   name: string;
   per: 'piece' | 'strike' | 'panel' | 'strip' | 'run';
   setupMinutes: Decimal;

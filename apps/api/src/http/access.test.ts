@@ -18,12 +18,13 @@ let operations: { method: Method; path: string; access: Operation['x-access'] }[
 beforeAll(async () => {
   shop = await startTestShop();
   const { body } = await shop.nobody().get('/api/openapi.json').expect(200);
-  operations = Object.entries(body.paths as Record<string, Record<Method, Operation>>).flatMap(([path, methods]) =>
-    Object.entries(methods).map(([method, operation]) => ({
-      method: method as Method,
-      path: path.replaceAll(/\{\w+\}/g, '987654321'),
-      access: operation['x-access'],
-    })),
+  operations = Object.entries(body.paths as Record<string, Record<Method, Operation>>).flatMap(
+    ([path, methods]) =>
+      Object.entries(methods).map(([method, operation]) => ({
+        method: method as Method,
+        path: path.replaceAll(/\{\w+\}/g, '987654321'),
+        access: operation['x-access'],
+      })),
   );
 });
 
@@ -35,13 +36,18 @@ describe('[S14] who may call what', () => {
   it('is said for every endpoint of the document', () => {
     expect(operations).toHaveLength(endpoints.length);
     for (const { access } of operations) {
-      const named = Array.isArray(access) && access.length > 0 && access.every((role) => roles.some((known) => known === role));
+      const named =
+        Array.isArray(access) &&
+        access.length > 0 &&
+        access.every((role) => roles.some((known) => known === role));
       expect(named || access === 'anyone' || access === 'link').toBe(true);
     }
   });
 
   it('is said for every route of the application, and each is in the contract', async () => {
-    const declared = endpoints.map(({ method, path }) => `${method} ${path.replaceAll(/\{(\w+)\}/g, ':$1')}`);
+    const declared = endpoints.map(
+      ({ method, path }) => `${method} ${path.replaceAll(/\{(\w+)\}/g, ':$1')}`,
+    );
     const served = routesOf(await createApp(shop.context));
     expect(served.filter((route) => !declared.includes(route))).toEqual([]);
     expect(declared.filter((route) => !served.includes(route))).toEqual([]);
@@ -59,7 +65,9 @@ describe('[S14] who may call what', () => {
     for (const { method, path, access } of operations) {
       if (!Array.isArray(access)) continue;
       const { status } = await shop.as(role)[method](`/api${path}`);
-      expect(`${method} ${path} refused: ${status === 403}`).toBe(`${method} ${path} refused: ${!access.includes(role)}`);
+      expect(`${method} ${path} refused: ${status === 403}`).toBe(
+        `${method} ${path} refused: ${!access.includes(role)}`,
+      );
       expect(status, `${method} ${path}`).toBeLessThan(500);
     }
   });
@@ -74,13 +82,17 @@ interface Layer {
 /** Every route that the API routers answer, read off the application itself. */
 function routesOf(app: { router: Router }): string[] {
   const layers = (app.router as unknown as { stack: Layer[] }).stack;
-  return layers.flatMap((layer) => routesBelow(layer)).filter((route) => !route.includes('{*path}'));
+  return layers
+    .flatMap((layer) => routesBelow(layer))
+    .filter((route) => !route.includes('{*path}'));
 }
 
 function routesBelow({ route, handle }: Layer): string[] {
   if (route !== undefined) {
     // The sign-in limits share the sign-in's address; they are counted once.
-    return [...new Set(Object.keys(route.methods))].map((method) => `${method.toUpperCase()} ${route.path}`);
+    return [...new Set(Object.keys(route.methods))].map(
+      (method) => `${method.toUpperCase()} ${route.path}`,
+    );
   }
   return (handle.stack ?? []).flatMap(routesBelow);
 }

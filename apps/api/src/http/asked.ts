@@ -28,7 +28,11 @@ export function readAsked<E extends Endpoint>(endpoint: E, request: Request): As
 
 function readBody(endpoint: Endpoint, request: Request): unknown {
   if (endpoint.body === undefined) return undefined;
-  if (request.body === undefined && request.get('Content-Length') !== undefined && request.get('Content-Length') !== '0') {
+  if (
+    request.body === undefined &&
+    request.get('Content-Length') !== undefined &&
+    request.get('Content-Length') !== '0'
+  ) {
     throw new Problem(415, 'Not JSON', 'Send the request body as application/json.');
   }
   return read(endpoint.body, request.body ?? {}, false);
@@ -39,19 +43,26 @@ function read(schema: z.ZodType | undefined, value: unknown, inPath: boolean): u
   const parsed = schema.safeParse(value);
   if (parsed.success) return parsed.data;
   // A path that names nothing that could exist is a thing that does not exist.
-  if (inPath) throw new Problem(404, 'Not found', 'There is nothing at this address. Go back to the list.');
+  if (inPath)
+    throw new Problem(404, 'Not found', 'There is nothing at this address. Go back to the list.');
   throw invalid(parsed.error.issues.flatMap(faultsOf));
 }
 
 function faultsOf(issue: z.core.$ZodIssue): FieldFault[] {
   if (issue.code === 'unrecognized_keys') {
-    return issue.keys.map((key) => ({ field: [...issue.path, key].join('.'), message: `${key} is not asked for here. Leave it out.` }));
+    return issue.keys.map((key) => ({
+      field: [...issue.path, key].join('.'),
+      message: `${key} is not asked for here. Leave it out.`,
+    }));
   }
   if (issue.code === 'invalid_union') {
     const closest = [...issue.errors].sort((a, b) => a.length - b.length)[0] ?? [];
     const inner = closest.flatMap(faultsOf);
     if (inner.length > 0) {
-      return inner.map((fault) => ({ ...fault, field: [...issue.path, fault.field].filter(String).join('.') }));
+      return inner.map((fault) => ({
+        ...fault,
+        field: [...issue.path, fault.field].filter(String).join('.'),
+      }));
     }
   }
   return [{ field: issue.path.join('.'), message: issue.message }];

@@ -5,11 +5,19 @@ import { Problem } from './problem.ts';
 /** @throws {Problem} 428 when the version that was read is not named, 400 when it is no version */
 export function readIfMatch(header: string | undefined): number {
   if (header === undefined) {
-    throw new Problem(428, 'Say which version', 'Send If-Match with the version you read, so that nobody’s change is lost.');
+    throw new Problem(
+      428,
+      'Say which version',
+      'Send If-Match with the version you read, so that nobody’s change is lost.',
+    );
   }
   const match = /^(?:W\/)?"(\d{1,15})"$/.exec(header.trim());
   if (match?.[1] === undefined) {
-    throw new Problem(400, 'Not a version', 'If-Match must be the ETag of what you read, such as "3".');
+    throw new Problem(
+      400,
+      'Not a version',
+      'If-Match must be the ETag of what you read, such as "3".',
+    );
   }
   return Number(match[1]);
 }
@@ -26,7 +34,11 @@ export async function requireVersion(
     { subjectKind: subject.kind, subjectId: subject.id },
     { orderBy: { seq: 'desc' } },
   );
-  const changed = { by: last?.actorName ?? 'somebody', at: last?.at ?? '', what: last?.action ?? 'changed it' };
+  const changed = {
+    by: last?.actorName ?? 'somebody',
+    at: last?.at ?? '',
+    what: last?.action ?? 'changed it',
+  };
   throw new Problem(
     412,
     'Changed meanwhile',

@@ -12,7 +12,8 @@ afterAll(async () => {
 });
 
 const leather = (name: string) => ({ name, pricePerFt2: '9.50' });
-const add = (key: string, body: object) => shop.as('owner').post('/api/leathers').set('Idempotency-Key', key).send(body);
+const add = (key: string, body: object) =>
+  shop.as('owner').post('/api/leathers').set('Idempotency-Key', key).send(body);
 const namesOf = async (q: string) => {
   const { body } = await shop.as('owner').get(`/api/leathers?q=${q}`);
   return (body.items as { name: string }[]).map((item) => item.name);
@@ -28,7 +29,9 @@ describe('[S35][I10] the same key', () => {
   });
 
   it('has one effect when both requests come at once', async () => {
-    const replies = await Promise.all([1, 2, 3, 4].map(() => add('key-at-once', leather('At once'))));
+    const replies = await Promise.all(
+      [1, 2, 3, 4].map(() => add('key-at-once', leather('At once'))),
+    );
     expect(replies.map((reply) => reply.status)).toEqual([201, 201, 201, 201]);
     expect(new Set(replies.map((reply) => reply.body.id)).size).toBe(1);
     expect(await namesOf('At once')).toEqual(['At once']);

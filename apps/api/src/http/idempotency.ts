@@ -16,10 +16,20 @@ export function readRequestKey(request: Request): RequestKey | undefined {
   const key = request.get('Idempotency-Key');
   if (key === undefined) return undefined;
   if (!/^[\x21-\x7e]{1,200}$/.test(key)) {
-    throw new Problem(400, 'Not a key', 'Idempotency-Key must be 1 to 200 visible characters; a UUID does well.');
+    throw new Problem(
+      400,
+      'Not a key',
+      'Idempotency-Key must be 1 to 200 visible characters; a UUID does well.',
+    );
   }
-  const requestHash = createHash('sha256').update(JSON.stringify(request.body ?? null)).digest('hex');
-  return { key, scope: `${request.user?.id ?? 'nobody'} ${request.method} ${request.originalUrl}`, requestHash };
+  const requestHash = createHash('sha256')
+    .update(JSON.stringify(request.body ?? null))
+    .digest('hex');
+  return {
+    key,
+    scope: `${request.user?.id ?? 'nobody'} ${request.method} ${request.originalUrl}`,
+    requestHash,
+  };
 }
 
 /**
@@ -36,7 +46,11 @@ export async function once(
   const earlier = await work.em.findOne(IdempotentReply, { key: asked.key, scope: asked.scope });
   if (earlier !== null) {
     if (earlier.requestHash !== asked.requestHash) {
-      throw new Problem(422, 'Key used before', 'This Idempotency-Key was used for another request. Send a new key.');
+      throw new Problem(
+        422,
+        'Key used before',
+        'This Idempotency-Key was used for another request. Send a new key.',
+      );
     }
     return { reply: earlier.reply, replayed: true };
   }

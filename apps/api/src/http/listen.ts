@@ -15,7 +15,13 @@ export async function listen(app: Express, config: Config): Promise<Listening> {
   const server = await serverFor(app, config);
   await new Promise<void>((resolve, reject) => {
     server.once('error', (error) => {
-      reject(inUse(error) ? new Error(`Port ${config.port} is in use. Stop what uses it, or set PORT to another one.`) : error);
+      reject(
+        inUse(error)
+          ? new Error(
+              `Port ${config.port} is in use. Stop what uses it, or set PORT to another one.`,
+            )
+          : error,
+      );
     });
     server.listen(config.port, config.host, resolve);
   });
@@ -24,7 +30,10 @@ export async function listen(app: Express, config: Config): Promise<Listening> {
 
 async function serverFor(app: Express, config: Config): Promise<http.Server> {
   if (config.tls === undefined) return http.createServer(app);
-  const [cert, key] = await Promise.all([readFile(config.tls.certFile), readFile(config.tls.keyFile)]);
+  const [cert, key] = await Promise.all([
+    readFile(config.tls.certFile),
+    readFile(config.tls.keyFile),
+  ]);
   return https.createServer({ cert, key }, app);
 }
 

@@ -1,10 +1,18 @@
-import { OpenAPIRegistry, OpenApiGeneratorV31, extendZodWithOpenApi, type RouteConfig } from '@asteasolutions/zod-to-openapi';
+import {
+  OpenAPIRegistry,
+  OpenApiGeneratorV31,
+  extendZodWithOpenApi,
+  type RouteConfig,
+} from '@asteasolutions/zod-to-openapi';
 import { z } from 'zod';
 import { endpoints, problem, type Endpoint } from '@hidewright/contract';
 
 extendZodWithOpenApi(z);
 
-const problemReply = { description: 'A refusal, as RFC 9457 has it', content: { 'application/problem+json': { schema: problem } } };
+const problemReply = {
+  description: 'A refusal, as RFC 9457 has it',
+  content: { 'application/problem+json': { schema: problem } },
+};
 
 /** The interface, generated from the contract; `x-access` says who may call. */
 export function openApiDocument() {
@@ -33,7 +41,10 @@ function describe(endpoint: Endpoint): RouteConfig {
     path: endpoint.path,
     summary: endpoint.summary,
     request,
-    responses: { [endpoint.creates === true ? 201 : 200]: replyOf(endpoint), default: problemReply },
+    responses: {
+      [endpoint.creates === true ? 201 : 200]: replyOf(endpoint),
+      default: problemReply,
+    },
     'x-access': endpoint.access,
   };
 }
@@ -42,5 +53,8 @@ function replyOf(endpoint: Endpoint) {
   if (endpoint.file !== undefined) {
     return { description: endpoint.summary, content: { [endpoint.file]: { schema: z.string() } } };
   }
-  return { description: endpoint.summary, content: { 'application/json': { schema: endpoint.reply } } };
+  return {
+    description: endpoint.summary,
+    content: { 'application/json': { schema: endpoint.reply } },
+  };
 }

@@ -10,7 +10,11 @@ export function readCursor(cursor: string | undefined): number | undefined {
   if (cursor === undefined) return undefined;
   const id = Number(Buffer.from(cursor, 'base64url').toString('utf8'));
   if (!Number.isSafeInteger(id) || id < 1) {
-    throw new Problem(400, 'Not a cursor', 'This page of the list cannot be found. Start from its first page.');
+    throw new Problem(
+      400,
+      'Not a cursor',
+      'This page of the list cannot be found. Start from its first page.',
+    );
   }
   return id;
 }

@@ -26,7 +26,11 @@ export class Problem extends Error {
 }
 
 export function notFound(what: string): Problem {
-  return new Problem(404, 'Not found', `There is no such ${what}. It may have been removed; go back to the list.`);
+  return new Problem(
+    404,
+    'Not found',
+    `There is no such ${what}. It may have been removed; go back to the list.`,
+  );
 }
 
 /** 409: the thing is in a state that does not allow this, with what it does allow. */
@@ -36,13 +40,23 @@ export function wrongState(detail: string, allowed: string[] = []): Problem {
 
 /** 422: what was typed makes no sense, field by field. */
 export function invalid(errors: FieldFault[]): Problem {
-  return new Problem(422, 'Please check what you entered', errors.map((e) => e.message).join(' '), { errors });
+  return new Problem(422, 'Please check what you entered', errors.map((e) => e.message).join(' '), {
+    errors,
+  });
 }
 
 export function signInFirst(): Problem {
-  return new Problem(401, 'Sign in first', 'You are not signed in, or your session has ended. Sign in and try again.');
+  return new Problem(
+    401,
+    'Sign in first',
+    'You are not signed in, or your session has ended. Sign in and try again.',
+  );
 }
 
 export function notYours(): Problem {
-  return new Problem(403, 'Not for your role', 'Your role does not allow this. Ask the owner of the shop.');
+  return new Problem(
+    403,
+    'Not for your role',
+    'Your role does not allow this. Ask the owner of the shop.',
+  );
 }

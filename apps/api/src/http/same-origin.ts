@@ -18,7 +18,11 @@ export function sameOrigin(config: Config): RequestHandler {
       (site !== undefined && site !== 'same-origin' && site !== 'none') ||
       (origin !== undefined && !ours.includes(origin));
     if (foreign) {
-      throw new Problem(403, 'Not from here', 'This request comes from another site. Open Hidewright itself and try again.');
+      throw new Problem(
+        403,
+        'Not from here',
+        'This request comes from another site. Open Hidewright itself and try again.',
+      );
     }
     next();
   };

@@ -1,5 +1,10 @@
 import type { Request, RequestHandler, Response, Router } from 'express';
-import { withoutConfidential, type Access, type Endpoint, type ReplyOf } from '@hidewright/contract';
+import {
+  withoutConfidential,
+  type Access,
+  type Endpoint,
+  type ReplyOf,
+} from '@hidewright/contract';
 import type { Context } from '../context.ts';
 import { inTransaction, reading, type Actor, type Work } from '../work.ts';
 import { readAsked, type Asked } from './asked.ts';
@@ -7,7 +12,11 @@ import { once, readRequestKey } from './idempotency.ts';
 import { notYours, signInFirst } from './problem.ts';
 
 /** What an endpoint does; `prepared` is what its preparation, outside the transaction, brought. */
-type Run<E extends Endpoint, Prepared> = (work: Work, asked: Asked<E>, prepared: Prepared) => Promise<ReplyOf<E>>;
+type Run<E extends Endpoint, Prepared> = (
+  work: Work,
+  asked: Asked<E>,
+  prepared: Prepared,
+) => Promise<ReplyOf<E>>;
 
 /**
  * Puts an endpoint of the contract on a router: who may call, what it takes, one transaction when it changes
@@ -25,7 +34,9 @@ export function serve<E extends Endpoint, Prepared = undefined>(
     const asked = readAsked(endpoint, request);
     const actor = actorOf(request);
     const prepared = (await prepare?.(asked, actor)) as Prepared;
-    const { reply, replayed } = await perform(context, endpoint, request, actor, (work) => run(work, asked, prepared));
+    const { reply, replayed } = await perform(context, endpoint, request, actor, (work) =>
+      run(work, asked, prepared),
+    );
     if (replayed) response.set('Idempotent-Replayed', 'true');
     sendReply(endpoint, response, reply, request.user?.role);
   });
@@ -81,9 +92,12 @@ async function perform(
   actor: Actor,
   run: (work: Work) => Promise<unknown>,
 ): Promise<{ reply: unknown; replayed: boolean }> {
-  if (endpoint.method === 'GET') return { reply: await reading(context, actor, run), replayed: false };
+  if (endpoint.method === 'GET')
+    return { reply: await reading(context, actor, run), replayed: false };
   const key = endpoint.creates === true ? readRequestKey(request) : undefined;
-  return inTransaction(context, actor, (work) => once(work, key, statusOf(endpoint), () => run(work)));
+  return inTransaction(context, actor, (work) =>
+    once(work, key, statusOf(endpoint), () => run(work)),
+  );
 }
 
 const statusOf = (endpoint: Endpoint) => (endpoint.creates === true ? 201 : 200);
@@ -95,6 +109,7 @@ export function sendReply(
   role: Express.User['role'] | undefined,
 ): void {
   const shown = withoutConfidential(endpoint.reply, reply, role);
-  if (typeof shown === 'object' && shown !== null && 'version' in shown) response.set('ETag', `"${String(shown.version)}"`);
+  if (typeof shown === 'object' && shown !== null && 'version' in shown)
+    response.set('ETag', `"${String(shown.version)}"`);
   response.status(statusOf(endpoint)).json(shown);
 }

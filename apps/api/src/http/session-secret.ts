@@ -6,7 +6,11 @@ import path from 'node:path';
 export async function sessionSecret(dataDir: string): Promise<string> {
   const file = path.join(dataDir, 'session-secret');
   try {
-    await writeFile(file, randomBytes(48).toString('base64url'), { flag: 'wx', mode: 0o600, flush: true });
+    await writeFile(file, randomBytes(48).toString('base64url'), {
+      flag: 'wx',
+      mode: 0o600,
+      flush: true,
+    });
   } catch (error) {
     if (!(error instanceof Error && 'code' in error && error.code === 'EEXIST')) throw error;
   }

@@ -32,7 +32,10 @@ export class SessionStore extends Store {
 
   override destroy(sessionId: string, done: Done = () => undefined): void {
     settle(
-      this.#orm.em.fork().nativeDelete(WebSession, { idHash: hash(sessionId) }).then(() => undefined),
+      this.#orm.em
+        .fork()
+        .nativeDelete(WebSession, { idHash: hash(sessionId) })
+        .then(() => undefined),
       done,
     );
   }

@@ -24,8 +24,11 @@ declare global {
 export type Authenticate = (request: Request) => Promise<Express.User | undefined>;
 
 /** Sessions by cookie, kept in the database, and the person behind each. */
-export async function sessions(context: Context): Promise<{ middleware: RequestHandler[]; authenticate: Authenticate }> {
-  const secure = context.config.tls !== undefined || context.config.publicUrl?.startsWith('https:') === true;
+export async function sessions(
+  context: Context,
+): Promise<{ middleware: RequestHandler[]; authenticate: Authenticate }> {
+  const secure =
+    context.config.tls !== undefined || context.config.publicUrl?.startsWith('https:') === true;
   const keeper = session({
     name: secure ? '__Host-hidewright' : 'hidewright',
     secret: await sessionSecret(context.config.dataDir),
@@ -37,12 +40,19 @@ export async function sessions(context: Context): Promise<{ middleware: RequestH
   });
   const authenticator = passportFor(context);
   return {
-    middleware: [keeper, authenticator.initialize() as RequestHandler, authenticator.session() as RequestHandler],
+    middleware: [
+      keeper,
+      authenticator.initialize() as RequestHandler,
+      authenticator.session() as RequestHandler,
+    ],
     authenticate: (request) => byPassword(authenticator, request),
   };
 }
 
-function byPassword(authenticator: passport.Authenticator, request: Request): Promise<Express.User | undefined> {
+function byPassword(
+  authenticator: passport.Authenticator,
+  request: Request,
+): Promise<Express.User | undefined> {
   return new Promise((resolve, reject) => {
     const answer = (error: unknown, person: Express.User | false | undefined) => {
       if (error) reject(error instanceof Error ? error : new Error(String(error)));
@@ -84,13 +94,21 @@ function passportFor(context: Context): passport.Authenticator {
   return authenticator as passport.Authenticator;
 }
 
-async function findByPassword(context: Context, email: string, password: string): Promise<Express.User | undefined> {
-  const person = await context.orm.em.fork().findOne(Person, { email: email.trim().toLowerCase(), active: true });
+async function findByPassword(
+  context: Context,
+  email: string,
+  password: string,
+): Promise<Express.User | undefined> {
+  const person = await context.orm.em
+    .fork()
+    .findOne(Person, { email: email.trim().toLowerCase(), active: true });
   const matches = await checkPassword(person?.passwordHash, password);
   return person !== null && matches ? person : undefined;
 }
 
 async function findActive(context: Context, id: number): Promise<Express.User | undefined> {
   const person = await context.orm.em.fork().findOne(Person, { id, active: true });
-  return person === null ? undefined : { id: person.id, name: person.name, email: person.email, role: person.role };
+  return person === null
+    ? undefined
+    : { id: person.id, name: person.name, email: person.email, role: person.role };
 }

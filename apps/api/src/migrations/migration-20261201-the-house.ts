@@ -526,7 +526,16 @@ const post = [
   ) STRICT`,
 ];
 
-const ledgers = ['stock_movement', 'payment', 'impression', 'posting', 'activity', 'bench_log', 'pattern_version', 'period'];
+const ledgers = [
+  'stock_movement',
+  'payment',
+  'impression',
+  'posting',
+  'activity',
+  'bench_log',
+  'pattern_version',
+  'period',
+];
 
 /** The whole house: every table STRICT, with the limits that the code enforces said again as CHECKs. */
 export class TheHouse extends Migration {

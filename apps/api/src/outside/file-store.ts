@@ -25,7 +25,8 @@ export class FileStore {
   }
 
   #path(hash: string): string {
-    if (!/^[0-9a-f]{64}$/.test(hash)) throw new TypeError('A kept file is named by the hash of its bytes');
+    if (!/^[0-9a-f]{64}$/.test(hash))
+      throw new TypeError('A kept file is named by the hash of its bytes');
     return path.join(this.#folder, hash);
   }
 }

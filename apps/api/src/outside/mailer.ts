@@ -20,9 +20,16 @@ export interface Mailer {
 /** Mail goes out by SMTP to wherever SMTP_URL says. */
 export function connectMail(config: Config): Mailer {
   if (config.smtpUrl === undefined) {
-    return { available: false, send: () => Promise.reject(new Error('No mail server is set (SMTP_URL)')) };
+    return {
+      available: false,
+      send: () => Promise.reject(new Error('No mail server is set (SMTP_URL)')),
+    };
   }
-  const transport = nodemailer.createTransport({ url: config.smtpUrl, connectionTimeout: 10_000, socketTimeout: 30_000 });
+  const transport = nodemailer.createTransport({
+    url: config.smtpUrl,
+    connectionTimeout: 10_000,
+    socketTimeout: 30_000,
+  });
   return {
     available: true,
     async send(letter) {

@@ -7,8 +7,8 @@ const font = (file: string) => require.resolve(`@expo-google-fonts/noto-sans/${f
 /** Colours of the look, for paper. */
 export const ink = '#23201B';
 export const inkSoft = '#5E574C';
-export const manila = '#F0E3C4';
-export const stitch = '#CDBF9F';
+const manila = '#F0E3C4';
+const stitch = '#CDBF9F';
 export const russet = '#94481F';
 
 /** A4, in points. */
@@ -73,13 +73,11 @@ export function ticketHead(
     .restore();
   paper.fillColor(ink).font('strong').fontSize(13);
   paper.text(head.number, left + 38, top + 12, { lineBreak: false });
-  paper
-    .fontSize(11)
-    .text(head.shop, left + 200, top + 14, {
-      width: right - left - 214,
-      align: 'right',
-      lineBreak: false,
-    });
+  paper.fontSize(11).text(head.shop, left + 200, top + 14, {
+    width: right - left - 214,
+    align: 'right',
+    lineBreak: false,
+  });
   paper
     .fontSize(17)
     .text(head.name, left + 38, top + 32, { width: right - left - 60, height: 24, ellipsis: true });

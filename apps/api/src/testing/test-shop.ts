@@ -36,7 +36,8 @@ export async function startTestShop(settings: Record<string, string> = {}): Prom
   await openWithThree(context);
   const app = await createApp(context);
   const agents = new Map<Role, Agent>();
-  for (const role of ['owner', 'maker', 'bookkeeper'] as const) agents.set(role, await signedIn(app, role));
+  for (const role of ['owner', 'maker', 'bookkeeper'] as const)
+    agents.set(role, await signedIn(app, role));
   return {
     context,
     clock,
@@ -72,6 +73,9 @@ async function openWithThree(context: Context): Promise<void> {
 
 async function signedIn(app: Parameters<typeof supertest.agent>[0], role: Role): Promise<Agent> {
   const agent = supertest.agent(app);
-  await agent.post('/api/session').send({ email: `${role}@example.com`, password: testPassword }).expect(200);
+  await agent
+    .post('/api/session')
+    .send({ email: `${role}@example.com`, password: testPassword })
+    .expect(200);
   return agent;
 }

@@ -31,7 +31,9 @@ export const bookRules: Rule[] = [
     find: async ({ query }) => {
       const lines = await query<LineRow>('SELECT * FROM invoice_line');
       const invoices = await query<InvoiceRow>('SELECT * FROM invoice');
-      return invoices.filter((invoice) => !addsUp(invoice, lines)).map((invoice) => `${nameOf(invoice)} does not add up`);
+      return invoices
+        .filter((invoice) => !addsUp(invoice, lines))
+        .map((invoice) => `${nameOf(invoice)} does not add up`);
     },
   },
   none(
@@ -72,15 +74,22 @@ export const bookRules: Rule[] = [
     says: 'An issued invoice is as it was issued',
     find: async ({ query }) => {
       const issued = await query<InvoiceRow>('SELECT * FROM invoice WHERE number IS NOT NULL');
-      return issued.filter((invoice) => !isAsIssued(invoice)).map((invoice) => `${nameOf(invoice)} was changed after it was issued`);
+      return issued
+        .filter((invoice) => !isAsIssued(invoice))
+        .map((invoice) => `${nameOf(invoice)} was changed after it was issued`);
     },
   },
-  { says: 'A locked period’s totals are those it was locked at', find: ({ query }) => changedPeriods(query) },
+  {
+    says: 'A locked period’s totals are those it was locked at',
+    find: ({ query }) => changedPeriods(query),
+  },
 ];
 
 function addsUp(invoice: InvoiceRow, all: LineRow[]): boolean {
   const lines = all.filter((line) => line.invoice_id === invoice.id);
-  const amountsHold = lines.every((line) => Math.round((line.quantity * line.unit_price) / 100) === line.amount);
+  const amountsHold = lines.every(
+    (line) => Math.round((line.quantity * line.unit_price) / 100) === line.amount,
+  );
   const totals = invoiceTotals(
     lines.map((line) => ({
       amount: (line.amount / 100).toFixed(2),
@@ -97,11 +106,17 @@ function addsUp(invoice: InvoiceRow, all: LineRow[]): boolean {
 }
 
 function isAsIssued(invoice: InvoiceRow): boolean {
-  return createHash('sha256').update(invoice.snapshot ?? '').digest('hex') === invoice.snapshot_hash;
+  return (
+    createHash('sha256')
+      .update(invoice.snapshot ?? '')
+      .digest('hex') === invoice.snapshot_hash
+  );
 }
 
 async function changedPeriods(query: Query): Promise<string[]> {
-  const locked = await query<{ from_day: string; to_day: string; totals: string }>('SELECT * FROM period');
+  const locked = await query<{ from_day: string; to_day: string; totals: string }>(
+    'SELECT * FROM period',
+  );
   const faults: string[] = [];
   for (const period of locked) {
     const head = { fromDay: period.from_day, toDay: period.to_day, workshopName: '', currency: '' };

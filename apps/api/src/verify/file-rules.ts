@@ -31,13 +31,20 @@ export const fileRules: Rule[] = [
       ];
     },
   },
-  { says: 'The log of who did what is whole: no row was changed, left out or put in', find: ({ query }) => brokenChain(query) },
+  {
+    says: 'The log of who did what is whole: no row was changed, left out or put in',
+    find: ({ query }) => brokenChain(query),
+  },
   {
     says: 'Every kept file is there and has the bytes it had',
     find: async ({ query, dataDir }) => {
-      const kept = await query<{ hash: string; name: string }>('SELECT hash, name FROM stored_file');
+      const kept = await query<{ hash: string; name: string }>(
+        'SELECT hash, name FROM stored_file',
+      );
       const sound = await Promise.all(kept.map((file) => hasItsBytes(dataDir, file.hash)));
-      return kept.filter((_, index) => sound[index] === false).map((file) => `${file.name} is missing or was changed`);
+      return kept
+        .filter((_, index) => sound[index] === false)
+        .map((file) => `${file.name} is missing or was changed`);
     },
   },
 ];
@@ -59,7 +66,8 @@ async function brokenChain(query: Query): Promise<string[]> {
       previousHash: row.previous_hash,
     };
     const follows = row.seq === previous.seq + 1 && row.previous_hash === previous.hash;
-    if (!follows || activityHash(whole) !== row.hash) faults.push(`row ${row.seq} of the log does not fit`);
+    if (!follows || activityHash(whole) !== row.hash)
+      faults.push(`row ${row.seq} of the log does not fit`);
     previous = row;
   }
   return faults;

@@ -21,18 +21,26 @@ export const quoteRules: Rule[] = [
   {
     says: 'Every quote’s numbers follow from what it was priced from',
     find: async ({ query }) => {
-      const quotes = await query<QuoteRow>('SELECT id, number, revision, input, numbers FROM quote');
-      return quotes.filter((quote) => !followFromInput(quote)).map((quote) => `${nameOf(quote)} would price differently`);
+      const quotes = await query<QuoteRow>(
+        'SELECT id, number, revision, input, numbers FROM quote',
+      );
+      return quotes
+        .filter((quote) => !followFromInput(quote))
+        .map((quote) => `${nameOf(quote)} would price differently`);
     },
   },
   {
     says: 'Every rung of a quote has the price that its numbers say',
     find: async ({ query }) => {
-      const quotes = await query<QuoteRow>('SELECT id, number, revision, input, numbers FROM quote');
+      const quotes = await query<QuoteRow>(
+        'SELECT id, number, revision, input, numbers FROM quote',
+      );
       const rungs = await query<BreakRow>(
         'SELECT quote_id AS quoteId, quantity, price_each AS priceEach, total FROM quote_break ORDER BY quantity',
       );
-      return quotes.filter((quote) => !hasItsRungs(quote, rungs)).map((quote) => `${nameOf(quote)} has other rungs than its numbers`);
+      return quotes
+        .filter((quote) => !hasItsRungs(quote, rungs))
+        .map((quote) => `${nameOf(quote)} has other rungs than its numbers`);
     },
   },
   none(
@@ -65,8 +73,14 @@ function followFromInput(quote: QuoteRow): boolean {
 
 function hasItsRungs(quote: QuoteRow, all: BreakRow[]): boolean {
   const { breaks } = JSON.parse(quote.numbers) as ReturnType<typeof priceRun>;
-  const said = breaks.map((rung) => [rung.quantity, Math.round(Number(rung.priceEach) * 10_000), Math.round(Number(rung.total) * 100)]);
-  const kept = all.filter((rung) => rung.quoteId === quote.id).map((rung) => [rung.quantity, rung.priceEach, rung.total]);
+  const said = breaks.map((rung) => [
+    rung.quantity,
+    Math.round(Number(rung.priceEach) * 10_000),
+    Math.round(Number(rung.total) * 100),
+  ]);
+  const kept = all
+    .filter((rung) => rung.quoteId === quote.id)
+    .map((rung) => [rung.quantity, rung.priceEach, rung.total]);
   return isDeepStrictEqual(said.sort(byQuantity), kept.sort(byQuantity));
 }
 

@@ -1,7 +1,7 @@
 /** Reads rows from the database under test; integers come as they are stored. */
 export type Query = <Row>(sql: string) => Promise<Row[]>;
 
-export interface VerifiedFolder {
+interface VerifiedFolder {
   query: Query;
   dataDir: string;
 }
@@ -14,5 +14,8 @@ export interface Rule {
 
 /** A rule whose faults are the rows of one query; each row's `fault` column is its sentence. */
 export function none(says: string, sql: string): Rule {
-  return { says, find: async ({ query }) => (await query<{ fault: string }>(sql)).map((row) => row.fault) };
+  return {
+    says,
+    find: async ({ query }) => (await query<{ fault: string }>(sql)).map((row) => row.fault),
+  };
 }

@@ -23,8 +23,14 @@ afterAll(async () => {
 async function alteredCopy(sql: string): Promise<string> {
   const copy = await mkdtemp(path.join(folder, 'altered-'));
   await cp(demo, copy, { recursive: true });
-  const connection = knex({ client: 'sqlite3', connection: { filename: databaseFile(copy) }, useNullAsDefault: true });
-  const triggers = (await connection.raw(`SELECT name FROM sqlite_master WHERE type = 'trigger'`)) as { name: string }[];
+  const connection = knex({
+    client: 'sqlite3',
+    connection: { filename: databaseFile(copy) },
+    useNullAsDefault: true,
+  });
+  const triggers = (await connection.raw(
+    `SELECT name FROM sqlite_master WHERE type = 'trigger'`,
+  )) as { name: string }[];
   for (const { name } of triggers) await connection.raw(`DROP TRIGGER ${name}`);
   await connection.raw('PRAGMA ignore_check_constraints = ON');
   await connection.raw(sql);
@@ -32,7 +38,8 @@ async function alteredCopy(sql: string): Promise<string> {
   return copy;
 }
 
-const broken = async (copy: string) => (await verifyFolder(copy)).filter((rule) => rule.faults.length > 0).map((rule) => rule.says);
+const broken = async (copy: string) =>
+  (await verifyFolder(copy)).filter((rule) => rule.faults.length > 0).map((rule) => rule.says);
 
 describe('verifying a data folder', () => {
   it('finds nothing wrong with the demo', async () => {
@@ -40,30 +47,96 @@ describe('verifying a data folder', () => {
   });
 
   it.each([
-    ['one movement', 'UPDATE stock_movement SET quantity = quantity + 1 WHERE id = (SELECT MAX(id) FROM stock_movement)', 'sum of its movements'],
-    ['a movement deleted', 'DELETE FROM stock_movement WHERE id = (SELECT MAX(id) FROM stock_movement)', 'sum of its movements'],
-    ['one row of the log', `UPDATE activity SET actor_name = 'Nobody' WHERE seq = 40`, 'log of who did what is whole'],
-    ['a row of the log left out', 'DELETE FROM activity WHERE seq = 40', 'log of who did what is whole'],
-    ['what is on hand', 'UPDATE stock_balance SET on_hand = on_hand + 1 WHERE id = 1', 'sum of its movements'],
-    ['what is held', 'UPDATE stock_balance SET reserved = reserved + 1 WHERE id = 1', 'what the jobs hold'],
+    [
+      'one movement',
+      'UPDATE stock_movement SET quantity = quantity + 1 WHERE id = (SELECT MAX(id) FROM stock_movement)',
+      'sum of its movements',
+    ],
+    [
+      'a movement deleted',
+      'DELETE FROM stock_movement WHERE id = (SELECT MAX(id) FROM stock_movement)',
+      'sum of its movements',
+    ],
+    [
+      'one row of the log',
+      `UPDATE activity SET actor_name = 'Nobody' WHERE seq = 40`,
+      'log of who did what is whole',
+    ],
+    [
+      'a row of the log left out',
+      'DELETE FROM activity WHERE seq = 40',
+      'log of who did what is whole',
+    ],
+    [
+      'what is on hand',
+      'UPDATE stock_balance SET on_hand = on_hand + 1 WHERE id = 1',
+      'sum of its movements',
+    ],
+    [
+      'what is held',
+      'UPDATE stock_balance SET reserved = reserved + 1 WHERE id = 1',
+      'what the jobs hold',
+    ],
     ['a lot’s cost', 'UPDATE lot SET cost = cost + 1 WHERE id = 1', 'at its cost'],
-    ['what came on an order line', 'UPDATE purchase_line SET received = received - 1 WHERE received > 0', 'what was received on it'],
+    [
+      'what came on an order line',
+      'UPDATE purchase_line SET received = received - 1 WHERE received > 0',
+      'what was received on it',
+    ],
     ['a tool’s wear', `UPDATE tool SET used = used - 1 WHERE used > 0`, 'sum of its ledger'],
-    ['a price that was quoted', 'UPDATE quote_break SET price_each = price_each + 100 WHERE id = 3', 'the price that its numbers say'],
-    ['a cost that was quoted from', `UPDATE quote SET input = json_set(input, '$.leather.pricePerFt2', '1.00') WHERE id = 2`, 'follow from'],
-    ['an order’s price', 'UPDATE customer_order SET price_each = price_each + 1 WHERE id = 1', 'what its quote offered'],
-    ['a count at the bench', 'UPDATE job_step SET good = good + 1 WHERE id = 1', 'what was logged on it'],
-    ['minutes in the log of the bench', 'UPDATE bench_log SET minutes = minutes + 100 WHERE id = 1', 'what was logged on it'],
-    ['an invoice’s total', 'UPDATE invoice SET total = total + 1, net = net + 1 WHERE id = 1', 'sum of its lines'],
-    ['an invoice’s line', 'UPDATE invoice_line SET amount = amount + 1 WHERE id = 1', 'sum of its lines'],
-    ['what an invoice said', `UPDATE invoice SET snapshot = replace(snapshot, 'Heron', 'Hero') WHERE id = 1`, 'as it was issued'],
+    [
+      'a price that was quoted',
+      'UPDATE quote_break SET price_each = price_each + 100 WHERE id = 3',
+      'the price that its numbers say',
+    ],
+    [
+      'a cost that was quoted from',
+      `UPDATE quote SET input = json_set(input, '$.leather.pricePerFt2', '1.00') WHERE id = 2`,
+      'follow from',
+    ],
+    [
+      'an order’s price',
+      'UPDATE customer_order SET price_each = price_each + 1 WHERE id = 1',
+      'what its quote offered',
+    ],
+    [
+      'a count at the bench',
+      'UPDATE job_step SET good = good + 1 WHERE id = 1',
+      'what was logged on it',
+    ],
+    [
+      'minutes in the log of the bench',
+      'UPDATE bench_log SET minutes = minutes + 100 WHERE id = 1',
+      'what was logged on it',
+    ],
+    [
+      'an invoice’s total',
+      'UPDATE invoice SET total = total + 1, net = net + 1 WHERE id = 1',
+      'sum of its lines',
+    ],
+    [
+      'an invoice’s line',
+      'UPDATE invoice_line SET amount = amount + 1 WHERE id = 1',
+      'sum of its lines',
+    ],
+    [
+      'what an invoice said',
+      `UPDATE invoice SET snapshot = replace(snapshot, 'Heron', 'Hero') WHERE id = 1`,
+      'as it was issued',
+    ],
     ['a payment', 'UPDATE payment SET amount = amount - 1 WHERE id = 1', 'Paid, credited and open'],
     ['a posting', 'UPDATE posting SET amount = amount + 1 WHERE id = 1', 'sums to nought'],
     ['a number skipped', 'UPDATE invoice SET sequence = 900 WHERE id = 5', 'without a gap'],
-    ['a locked period', `UPDATE period SET totals = json_set(totals, '$.net', '1.00') WHERE id = 2`, 'locked at'],
+    [
+      'a locked period',
+      `UPDATE period SET totals = json_set(totals, '$.net', '1.00') WHERE id = 2`,
+      'locked at',
+    ],
     ['a layout', 'UPDATE layout SET pieces = pieces + 1 WHERE id = 1', 'those that it draws'],
   ])('notices %s that was altered', async (_what, sql, says) => {
-    expect(await broken(await alteredCopy(sql))).toEqual(expect.arrayContaining([expect.stringContaining(says)]));
+    expect(await broken(await alteredCopy(sql))).toEqual(
+      expect.arrayContaining([expect.stringContaining(says)]),
+    );
   });
 
   it('notices a kept file that was altered or is gone', async () => {

@@ -19,13 +19,17 @@ const rules = [...fileRules, ...stockRules, ...quoteRules, ...workRules, ...book
 export async function verifyFolder(dataDir: string): Promise<Verified[]> {
   const connection = knex({
     client: 'sqlite3',
-    connection: { filename: `${pathToFileURL(databaseFile(dataDir)).href}?mode=ro`, flags: ['OPEN_URI'] },
+    connection: {
+      filename: `${pathToFileURL(databaseFile(dataDir)).href}?mode=ro`,
+      flags: ['OPEN_URI'],
+    },
     useNullAsDefault: true,
   });
   const query: Query = async <Row>(sql: string) => (await connection.raw(sql)) as Row[];
   try {
     const results: Verified[] = [];
-    for (const { says, find } of rules) results.push({ says, faults: await find({ query, dataDir }) });
+    for (const { says, find } of rules)
+      results.push({ says, faults: await find({ query, dataDir }) });
     return results;
   } finally {
     await connection.destroy();

@@ -1,4 +1,9 @@
-import { DomainError, layOut as layOutPieces, type Layout, type LayoutInput } from '@hidewright/domain';
+import {
+  DomainError,
+  layOut as layOutPieces,
+  type Layout,
+  type LayoutInput,
+} from '@hidewright/domain';
 
 /** An error's class is lost between threads, so a refusal travels as a value. */
 export type LayoutAnswer = { layout: Layout } | { refusal: string };

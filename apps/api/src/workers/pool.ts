@@ -26,7 +26,8 @@ export function startWorkers(config: Config): Workers {
   const database = databaseFile(config.dataDir);
   return {
     layOut: async (input) => layoutOf((await pool.run(input, { name: 'layOut' })) as LayoutAnswer),
-    salesSheet: (period) => pool.run({ ...period, database }, { name: 'salesSheet' }) as Promise<Uint8Array>,
+    salesSheet: (period) =>
+      pool.run({ ...period, database }, { name: 'salesSheet' }) as Promise<Uint8Array>,
     close: () => pool.close(),
   };
 }

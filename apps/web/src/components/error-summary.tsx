@@ -1,7 +1,7 @@
 import { useEffect, useRef } from 'react';
 import { OctagonAlert } from 'lucide-react';
 
-export interface SummaryError {
+interface SummaryError {
   /** The field it belongs to, if it is on the page. */
   fieldId?: string | undefined;
   message: string;

@@ -3,7 +3,7 @@ import { classNames } from '../lib/class-names.ts';
 import { countText, numberText, unitPriceText } from '../lib/formatting.ts';
 import { PriceLadderBar } from './price-ladder-bar.tsx';
 
-export interface Rung {
+interface Rung {
   quantity: number;
   unitPrice: string;
   /** Left of the price after everything bought, by bench hours. */

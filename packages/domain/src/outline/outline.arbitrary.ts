@@ -22,7 +22,7 @@ export const anOutline: fc.Arbitrary<Outline> = fc.oneof(
 );
 
 /** For the tests: tags with necks of all kinds. */
-export function aTag(): fc.Arbitrary<Outline> {
+function aTag(): fc.Arbitrary<Outline> {
   return fc
     .tuple(
       mm(30, 150),

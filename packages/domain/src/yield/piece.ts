@@ -26,7 +26,7 @@ export function quarterTurned(polygon: readonly Point[], quarters: number): Poin
   });
 }
 
-export function boundsOf(polygon: readonly Point[]): Bounds {
+function boundsOf(polygon: readonly Point[]): Bounds {
   const [xs, ys] = [polygon.map(({ x }) => x), polygon.map(({ y }) => y)];
   return {
     minX: Math.min(...xs),

@@ -5,7 +5,9 @@ import { Decimal } from 'decimal.js';
 export abstract class ScaledDecimal extends Type<Decimal | null, number | null> {
   abstract readonly places: number;
 
-  override convertToDatabaseValue(value: Decimal | string | number | null | undefined): number | null {
+  override convertToDatabaseValue(
+    value: Decimal | string | number | null | undefined,
+  ): number | null {
     if (value === null || value === undefined) return null;
     // Raw conditions and default values reach this as plain numbers, already scaled.
     if (typeof value === 'number') return value;

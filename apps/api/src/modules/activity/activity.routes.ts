@@ -10,7 +10,12 @@ export function activityRoutes(context: Context): Router {
 
   serve(router, context, listActivities, async ({ em }, { query }) => {
     const below = readCursor(query.cursor) ?? Number.MAX_SAFE_INTEGER;
-    const words = query.q === undefined ? {} : { $or: [{ action: { $like: `%${query.q}%` } }, { actorName: { $like: `%${query.q}%` } }] };
+    const words =
+      query.q === undefined
+        ? {}
+        : {
+            $or: [{ action: { $like: `%${query.q}%` } }, { actorName: { $like: `%${query.q}%` } }],
+          };
     const rows = await em.find(
       Activity,
       { seq: { $lt: below }, ...words },
@@ -18,7 +23,14 @@ export function activityRoutes(context: Context): Router {
     );
     const { items, next } = toPage(rows, query.limit, (row) => row.seq);
     return {
-      items: items.map(({ seq, at, actorName, actorRole, action, subjectKind }) => ({ seq, at, actorName, actorRole, action, subjectKind })),
+      items: items.map(({ seq, at, actorName, actorRole, action, subjectKind }) => ({
+        seq,
+        at,
+        actorName,
+        actorRole,
+        action,
+        subjectKind,
+      })),
       next,
     };
   });

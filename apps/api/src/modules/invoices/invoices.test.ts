@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { Decimal } from 'decimal.js';
+import { shipOrder } from '../../flows/ship-order.ts';
 import { inTransaction, theProgram } from '../../work.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { makeReadyOrder } from '../../testing/ready-order.ts';
@@ -354,10 +355,14 @@ describe('payments', () => {
     expect(log.map((deed) => deed.action)).toEqual([`closed ${order.number}`]);
   });
 
-  test('of a packed order leave it packed', async () => {
+  test('of a packed order leave it packed; shipping it then closes it', async () => {
     const { order, invoice } = await issued(null, { state: 'packed' });
     await pay(invoice.id, { amount: '505.00' }).expect(201);
     expect((await fresh().findOneOrFail(Order, order.id)).state).toBe('packed');
+    await inTransaction(shop.context, theProgram, (work) =>
+      shipOrder(work, order.id, '2026-12-01'),
+    );
+    expect((await fresh().findOneOrFail(Order, order.id)).state).toBe('closed');
   });
 
   test('are posted as money against receivables', async () => {

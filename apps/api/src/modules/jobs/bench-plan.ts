@@ -28,13 +28,13 @@ export interface PlannedDay {
 }
 
 /** The hundredths of a minute that a day still has. */
-export function capacityOn(bench: Bench, day: string): number {
+function capacityOn(bench: Bench, day: string): number {
   if (!isWorkday(day)) return 0;
   return day === bench.today ? Math.max(0, bench.perDay - bench.loggedToday) : bench.perDay;
 }
 
 /** Earliest promise first: if any order of work keeps all promises, this one does (Jackson 1955, from memory). */
-export function byPromise(work: readonly HeldWork[]): HeldWork[] {
+function byPromise(work: readonly HeldWork[]): HeldWork[] {
   return [...work].sort((a, b) =>
     a.promisedOn < b.promisedOn ? -1 : a.promisedOn > b.promisedOn ? 1 : a.jobId - b.jobId,
   );

@@ -63,11 +63,6 @@ export async function keepLayout(
 }
 
 /** @throws {Problem} 404 */
-export async function readLayout(em: Work['em'], id: number): Promise<Layout> {
-  return (await findLayout(em, id)).result as Layout;
-}
-
-/** @throws {Problem} 404 */
 export async function findLayout(em: Work['em'], id: number): Promise<StoredLayout> {
   const stored = await em.findOne(StoredLayout, id);
   if (stored === null) throw notFound('layout');

@@ -7,8 +7,7 @@ const dayMs = 24 * 60 * 60_000;
 const daysBeyondOffer = 90;
 
 /** Only this is kept: who reads the database cannot make a link of it. */
-export const tokenHash = (token: string): string =>
-  createHash('sha256').update(token).digest('hex');
+const tokenHash = (token: string): string => createHash('sha256').update(token).digest('hex');
 
 /** Makes a link of 256 random bits for a quote and gives its token, which can never be told again. */
 export async function issueLink(work: Work, quoteId: number, validUntil: string): Promise<string> {

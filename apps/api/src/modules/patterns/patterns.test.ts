@@ -122,8 +122,37 @@ describe('a pattern', () => {
   });
 
   it('keeps an honest layout of nothing, which no quote can be made of', async () => {
-    const pattern = await addPattern({ outline: { shape: 'round', diameterMm: '300' } });
-    expect(pattern.layout).toMatchObject({ pieces: 0, placements: [] });
+    const { id, layout } = await addPattern({ outline: { shape: 'round', diameterMm: '300' } });
+    expect(layout).toMatchObject({ pieces: 0, placements: [] });
+    const customer = await shop
+      .as('owner')
+      .post('/api/customers')
+      .send({ name: 'An inn' })
+      .expect(201);
+    const quote = { customerId: customer.body.id, patternId: id, breaks: [{ quantity: 100 }] };
+    const { body } = await shop.as('owner').post('/api/quotes').send(quote).expect(422);
+    expect(faultsOf(body)).toEqual(['patternId']);
+    expect(body.errors[0].message).toContain('Not one piece fits');
+    expect((await shop.as('owner').get('/api/quotes')).body.items).toEqual([]);
+  });
+
+  it('leaves a quote the version that it was made with', async () => {
+    const pattern = await addPattern();
+    const customer = await shop
+      .as('owner')
+      .post('/api/customers')
+      .send({ name: 'A brewery' })
+      .expect(201);
+    const asked = {
+      customerId: customer.body.id,
+      patternId: pattern.id,
+      breaks: [{ quantity: 100 }],
+    };
+    const quote = (await shop.as('owner').post('/api/quotes').send(asked).expect(201)).body;
+    await change(pattern, { definition: coaster(leatherId, { spacingMm: '12' }) }).expect(200);
+    const { body } = await shop.as('owner').get(`/api/quotes/${quote.id}`).expect(200);
+    expect(body).toMatchObject({ patternVersion: 1, layout: { pieces: pattern.layout.pieces } });
+    expect(body.numbers).toEqual(quote.numbers);
   });
 
   it('is made once however often the same request comes', async () => {

@@ -1,5 +1,10 @@
 import { Router } from 'express';
-import { addPerson, changePerson, listPeople, type Person as PersonReply } from '@hidewright/contract';
+import {
+  addPerson,
+  changePerson,
+  listPeople,
+  type Person as PersonReply,
+} from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { requireVersion } from '../../http/conditions.ts';
@@ -27,9 +32,19 @@ export function peopleRoutes(context: Context): Router {
       await requireFreeEmail(work, body.email);
       const { name, role } = body;
       const email = body.email.toLowerCase();
-      const person = work.em.create(Person, { name, role, email, passwordHash, createdAt: work.now.toISOString() });
+      const person = work.em.create(Person, {
+        name,
+        role,
+        email,
+        passwordHash,
+        createdAt: work.now.toISOString(),
+      });
       await work.em.flush();
-      await logDeed(work, { action: `let ${name} sign in as ${role}`, subjectKind: 'person', subjectId: person.id });
+      await logDeed(work, {
+        action: `let ${name} sign in as ${role}`,
+        subjectKind: 'person',
+        subjectId: person.id,
+      });
       return toReply(person);
     },
     ({ body }) => hashPassword(body.password),
@@ -42,13 +57,19 @@ export function peopleRoutes(context: Context): Router {
     async (work, { params, body, ifMatch }, passwordHash: string | undefined) => {
       const person = await work.em.findOne(Person, params.id);
       if (person === null) throw notFound('person');
-      await requireVersion(work.em, { kind: 'person', id: person.id, version: person.version }, ifMatch);
-      if (body.email !== undefined && body.email.toLowerCase() !== person.email) await requireFreeEmail(work, body.email);
+      await requireVersion(
+        work.em,
+        { kind: 'person', id: person.id, version: person.version },
+        ifMatch,
+      );
+      if (body.email !== undefined && body.email.toLowerCase() !== person.email)
+        await requireFreeEmail(work, body.email);
       const { name, role, active } = body;
       assignDefined(person, { name, role, active, passwordHash, email: body.email?.toLowerCase() });
       await work.em.flush();
       await requireAnOwner(work);
-      if (passwordHash !== undefined || active === false) await work.em.nativeDelete(WebSession, { personId: person.id });
+      if (passwordHash !== undefined || active === false)
+        await work.em.nativeDelete(WebSession, { personId: person.id });
       await logDeed(work, {
         action: `changed how ${person.name} signs in`,
         subjectKind: 'person',
@@ -65,7 +86,12 @@ export function peopleRoutes(context: Context): Router {
 
 async function requireFreeEmail(work: Work, email: string): Promise<void> {
   if ((await work.em.count(Person, { email: email.toLowerCase() })) > 0) {
-    throw invalid([{ field: 'email', message: 'Somebody signs in with this e-mail address already. Use another one.' }]);
+    throw invalid([
+      {
+        field: 'email',
+        message: 'Somebody signs in with this e-mail address already. Use another one.',
+      },
+    ]);
   }
 }
 

@@ -33,7 +33,7 @@ export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
 }
 
 /** An offer runs out after the shop's usual time, or on the day the goods are needed where that comes first. */
-export function lastGoodDay(today: string, validDays: number, inHandsOn: string | null): string {
+function lastGoodDay(today: string, validDays: number, inHandsOn: string | null): string {
   const usual = new Date(Date.parse(`${today}T00:00:00Z`) + validDays * 24 * 60 * 60_000)
     .toISOString()
     .slice(0, 10);

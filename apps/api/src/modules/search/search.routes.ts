@@ -11,8 +11,13 @@ export function searchRoutes(context: Context): Router {
     const pattern = `%${query.q.replaceAll(/[\\%_]/g, '\\$&')}%`;
     const items: Found[] = [];
     for (const { kind, sql, to } of sourcesFor(actor.role)) {
-      const rows = await em.execute<{ key: string; label: string; detail: string }[]>(sql, [pattern, pattern]);
-      items.push(...rows.map((row) => ({ kind, label: row.label, detail: row.detail, to: to(row.key) })));
+      const rows = await em.execute<{ key: string; label: string; detail: string }[]>(sql, [
+        pattern,
+        pattern,
+      ]);
+      items.push(
+        ...rows.map((row) => ({ kind, label: row.label, detail: row.detail, to: to(row.key) })),
+      );
     }
     return { items };
   });

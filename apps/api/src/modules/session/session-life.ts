@@ -19,7 +19,12 @@ function settled(start: (done: (error?: unknown) => void) => void): Promise<void
   return new Promise((resolve, reject) => {
     start((error) => {
       if (error === undefined || error === null) resolve();
-      else reject(error instanceof Error ? error : new Error('The session could not be kept', { cause: error }));
+      else
+        reject(
+          error instanceof Error
+            ? error
+            : new Error('The session could not be kept', { cause: error }),
+        );
     });
   });
 }

@@ -24,7 +24,11 @@ export function sessionRoutes(context: Context, authenticate: Authenticate): Rou
     readAsked(signIn, request);
     const person = await authenticate(request);
     if (person === undefined) {
-      throw new Problem(401, 'Not signed in', 'That e-mail address and password do not go together. Check both and try again.');
+      throw new Problem(
+        401,
+        'Not signed in',
+        'That e-mail address and password do not go together. Check both and try again.',
+      );
     }
     await startSession(request, person);
     sendReply(signIn, response, await describe(context, person), person.role);
@@ -39,7 +43,9 @@ export function sessionRoutes(context: Context, authenticate: Authenticate): Rou
   bind(router, openShop, async (request, response) => {
     const { body } = readAsked(openShop, request);
     const passwordHash = await hashPassword(body.password);
-    const owner = await inTransaction(context, theProgram, (work) => openNewShop(work, { ...body, passwordHash }));
+    const owner = await inTransaction(context, theProgram, (work) =>
+      openNewShop(work, { ...body, passwordHash }),
+    );
     await startSession(request, owner);
     sendReply(openShop, response, await describe(context, owner), owner.role);
   });

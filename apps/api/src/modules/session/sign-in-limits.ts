@@ -8,7 +8,10 @@ const windowMs = 15 * 60_000;
 /** Limits failed tries, by account and by address; a sign-in that succeeds is not counted. */
 export function signInLimits(context: Context): RequestHandler[] {
   const limit = context.config.signInLimit;
-  return [limitBy(limit, accountOf), limitBy(limit * 5, (request) => ipKeyGenerator(request.ip ?? ''))];
+  return [
+    limitBy(limit, accountOf),
+    limitBy(limit * 5, (request) => ipKeyGenerator(request.ip ?? '')),
+  ];
 }
 
 function limitBy(limit: number, keyGenerator: (request: Request) => string): RequestHandler {
@@ -20,9 +23,14 @@ function limitBy(limit: number, keyGenerator: (request: Request) => string): Req
     standardHeaders: false,
     legacyHeaders: false,
     handler: () => {
-      throw new Problem(429, 'Too many tries', 'Too many tries to sign in. Wait a quarter of an hour, then try again.', {
-        headers: { 'Retry-After': String(windowMs / 1000) },
-      });
+      throw new Problem(
+        429,
+        'Too many tries',
+        'Too many tries to sign in. Wait a quarter of an hour, then try again.',
+        {
+          headers: { 'Retry-After': String(windowMs / 1000) },
+        },
+      );
     },
   });
 }

@@ -30,7 +30,9 @@ export async function earned(work: Work): Promise<NonNullable<Today['earned']>> 
 
 function perHour(row: Row): NonNullable<Today['earned']>['jobs'] {
   const input = JSON.parse(row.input) as RunInput;
-  const rung = (JSON.parse(row.numbers) as RunNumbers).breaks.find((each) => each.quantity === row.quantity);
+  const rung = (JSON.parse(row.numbers) as RunNumbers).breaks.find(
+    (each) => each.quantity === row.quantity,
+  );
   if (rung === undefined) return [];
   const benchHours = new Decimal(row.minutes).dividedBy(6000);
   const allHours = benchHours.plus(new Decimal(input.deskMinutesPerOrder).dividedBy(60));

@@ -11,11 +11,10 @@ const ages = ['not due', '1–30 days', '31–60', 'older'] as const;
 
 /** What customers owe, by how long it has been due. */
 export async function owed(work: Work): Promise<NonNullable<Today['owed']>> {
-  const rows = await work.em.execute<{ age: string; hundredths: number }[]>(byAge.replaceAll(':today', '?'), [
-    work.today,
-    work.today,
-    work.today,
-  ]);
+  const rows = await work.em.execute<{ age: string; hundredths: number }[]>(
+    byAge.replaceAll(':today', '?'),
+    [work.today, work.today, work.today],
+  );
   return ages.map((age) => ({
     age,
     amount: ((rows.find((row) => row.age === age)?.hundredths ?? 0) / 100).toFixed(2),

@@ -8,6 +8,9 @@ const belowMark = `SELECT h.id, h.name, h.reorder_at AS reorderAt, COALESCE(b.on
 
 /** Hardware and supplies of which less is free than the shop wants to keep. */
 export async function short(work: Work): Promise<NonNullable<Today['short']>> {
-  const rows = await work.em.execute<{ id: number; name: string; reorderAt: number; free: number }[]>(belowMark);
+  const rows =
+    await work.em.execute<{ id: number; name: string; reorderAt: number; free: number }[]>(
+      belowMark,
+    );
   return rows.map(({ id, ...item }) => ({ ...item, to: `/stockroom/hardware/${id}` }));
 }

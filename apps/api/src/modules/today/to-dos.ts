@@ -40,6 +40,12 @@ async function firstSteps(work: Work): Promise<ToDo[]> {
     ];
   }
   return [
-    { ...step, title: 'Quote your first run', detail: 'Pick the pattern and type the quantities.', action: 'New quote', to: '/counter/quotes/new' },
+    {
+      ...step,
+      title: 'Quote your first run',
+      detail: 'Pick the pattern and type the quantities.',
+      action: 'New quote',
+      to: '/counter/quotes/new',
+    },
   ];
 }

@@ -5,7 +5,17 @@ import { LengthType, MoneyType, PercentType, TimeType } from '../../db/columns/c
 /** The shop itself and its starting values: one row, made when the database is. */
 @Entity({ tableName: 'workshop' })
 export class Workshop {
-  [OptionalProps]?: 'currency' | 'areaUnit' | 'lengthUnit' | 'timeZone' | 'deskMinutesPerOrder' | 'quoteValidDays' | 'paymentTermDays' | 'address' | 'taxNumber' | 'version';
+  [OptionalProps]?:
+    | 'currency'
+    | 'areaUnit'
+    | 'lengthUnit'
+    | 'timeZone'
+    | 'deskMinutesPerOrder'
+    | 'quoteValidDays'
+    | 'paymentTermDays'
+    | 'address'
+    | 'taxNumber'
+    | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;

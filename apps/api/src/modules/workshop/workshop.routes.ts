@@ -1,6 +1,11 @@
 import { Router } from 'express';
 import { Decimal } from 'decimal.js';
-import { changeWorkshop, readWorkshop, type BodyOf, type Workshop as WorkshopReply } from '@hidewright/contract';
+import {
+  changeWorkshop,
+  readWorkshop,
+  type BodyOf,
+  type Workshop as WorkshopReply,
+} from '@hidewright/contract';
 import { currencies } from '@hidewright/domain';
 import type { Context } from '../../context.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
@@ -15,7 +20,9 @@ export function workshopRoutes(context: Context): Router {
   const router = Router();
   const { available: mailAvailable } = context.mailer;
 
-  serve(router, context, readWorkshop, async ({ em }) => toReply(await em.findOneOrFail(Workshop, 1), mailAvailable));
+  serve(router, context, readWorkshop, async ({ em }) =>
+    toReply(await em.findOneOrFail(Workshop, 1), mailAvailable),
+  );
 
   serve(router, context, changeWorkshop, async (work, { body, ifMatch }) => {
     const workshop = await work.em.findOneOrFail(Workshop, 1);

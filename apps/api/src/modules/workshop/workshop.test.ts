@@ -19,7 +19,12 @@ const change = async (body: object) => {
 describe('the shop’s starting values', () => {
   it('are sensible from the start', async () => {
     const { body } = await shop.as('owner').get('/api/workshop').expect(200);
-    expect(body).toMatchObject({ currency: 'USD', rejectPercent: '10', targetPerHour: '60.00', timeZone: 'UTC' });
+    expect(body).toMatchObject({
+      currency: 'USD',
+      rejectPercent: '10',
+      targetPerHour: '60.00',
+      timeZone: 'UTC',
+    });
   });
 
   it('can be changed, one at a time', async () => {
@@ -48,7 +53,13 @@ describe('the shop’s starting values', () => {
   it('[S15] tell the maker no prices', async () => {
     const { body } = await shop.as('maker').get('/api/workshop').expect(200);
     expect(body).toMatchObject({ name: 'A Test Shop' });
-    for (const hidden of ['targetPerHour', 'wagePerHour', 'packingPerOrder', 'priceStep', 'depositPercent']) {
+    for (const hidden of [
+      'targetPerHour',
+      'wagePerHour',
+      'packingPerOrder',
+      'priceStep',
+      'depositPercent',
+    ]) {
       expect(body).not.toHaveProperty(hidden);
     }
   });

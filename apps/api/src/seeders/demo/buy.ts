@@ -17,22 +17,33 @@ type Purchase = (typeof purchases)[number];
 /** A supplier takes its lead days; the last order is still on its way when the year ends. */
 export function planPurchases(shop: DemoShop, year: Year, furnished: Furnished): void {
   for (const purchase of purchases) {
-    const leadDays = suppliers.find((supplier) => supplier.name === purchase.supplier)?.leadDays ?? 0;
+    const leadDays =
+      suppliers.find((supplier) => supplier.name === purchase.supplier)?.leadDays ?? 0;
     let orderId = 0;
     year.plan(purchase.daysBefore + leadDays, '08:20', async () => {
       orderId = await order(shop, furnished, purchase, year.day(purchase.daysBefore));
     });
-    year.plan(purchase.daysBefore, '11:15', () => shop.as('maker', (work) => receive(work, furnished, purchase, orderId)));
+    year.plan(purchase.daysBefore, '11:15', () =>
+      shop.as('maker', (work) => receive(work, furnished, purchase, orderId)),
+    );
   }
   year.plan(onItsWay.daysBefore, '08:40', async () => {
     await order(shop, furnished, onItsWay, year.end);
   });
 }
 
-function order(shop: DemoShop, furnished: Furnished, purchase: Purchase, expectedOn: string): Promise<number> {
+function order(
+  shop: DemoShop,
+  furnished: Furnished,
+  purchase: Purchase,
+  expectedOn: string,
+): Promise<number> {
   return shop.as('owner', async (work) => {
     const supplierId = furnished.suppliers.id(purchase.supplier);
-    const lines = [...(await leatherLines(work, furnished, purchase)), ...(await hardwareLines(work, furnished, purchase))];
+    const lines = [
+      ...(await leatherLines(work, furnished, purchase)),
+      ...(await hardwareLines(work, furnished, purchase)),
+    ];
     const { id } = await draftPurchaseOrder(work, { supplierId, expectedOn, note: '', lines });
     await sendPurchaseOrder(work, { id, by: 'mail', mailIsSet: true });
     return id;
@@ -60,19 +71,37 @@ async function hardwareLines({ em }: Work, furnished: Furnished, { hardware = []
   return lines;
 }
 
-async function receive(work: Work, furnished: Furnished, purchase: Purchase, purchaseOrderId: number): Promise<void> {
+async function receive(
+  work: Work,
+  furnished: Furnished,
+  purchase: Purchase,
+  purchaseOrderId: number,
+): Promise<void> {
   const open = await work.em.find(PurchaseLine, { purchaseOrderId });
   const lots = (purchase.leather ?? []).flatMap(({ name, form, areasFt2, shade }) => {
     const leatherId = furnished.leathers.id(name);
     const purchaseLineId = open.find((line) => line.leatherId === leatherId)?.id ?? null;
-    return areasFt2.map((ft2) => ({ ...blankLot, leatherId, purchaseLineId, form, measuredAreaMm2: areaOf(ft2), shade }));
+    return areasFt2.map((ft2) => ({
+      ...blankLot,
+      leatherId,
+      purchaseLineId,
+      form,
+      measuredAreaMm2: areaOf(ft2),
+      shade,
+    }));
   });
   const hardware = (purchase.hardware ?? []).map(({ name, quantity }) => {
     const hardwareId = furnished.hardware.id(name);
     const purchaseLineId = open.find((line) => line.hardwareId === hardwareId)?.id ?? null;
     return { hardwareId, purchaseLineId, quantity, cost: null };
   });
-  await receiveDelivery(work, { purchaseOrderId, receivedOn: work.today, lots, hardware, nothingMore: false });
+  await receiveDelivery(work, {
+    purchaseOrderId,
+    receivedOn: work.today,
+    lots,
+    hardware,
+    nothingMore: false,
+  });
 }
 
 const blankLot = {

@@ -34,7 +34,11 @@ export class DemoShop {
   }
 
   byCustomer<T>(useCase: (work: Work) => Promise<T>): Promise<T> {
-    return inTransaction(this.context, { id: null, name: 'The customer', role: 'customer' }, useCase);
+    return inTransaction(
+      this.context,
+      { id: null, name: 'The customer', role: 'customer' },
+      useCase,
+    );
   }
 }
 

@@ -42,8 +42,15 @@ async function openShop(shop: DemoShop): Promise<void> {
   await inTransaction(shop.context, theProgram, async (work) => {
     const [owner, ...others] = people;
     if (owner === undefined) throw new Error('The demo workshop needs an owner');
-    await openNewShop(work, { ...shopOf, ownerName: owner.name, email: owner.email, passwordHash, mode: 'demo' });
-    for (const each of others) work.em.create(Person, { ...each, passwordHash, createdAt: work.now.toISOString() });
+    await openNewShop(work, {
+      ...shopOf,
+      ownerName: owner.name,
+      email: owner.email,
+      passwordHash,
+      mode: 'demo',
+    });
+    for (const each of others)
+      work.em.create(Person, { ...each, passwordHash, createdAt: work.now.toISOString() });
     const workshop = await work.em.findOneOrFail(Workshop, 1);
     work.em.assign(workshop, { address: shopOf.address, taxNumber: shopOf.taxNumber });
     await work.em.flush();
@@ -60,7 +67,8 @@ async function furnishRooms(work: Work): Promise<Furnished> {
     patterns: new Named('pattern'),
     taxRateId: 0,
   };
-  for (const each of suppliers) await note(work, furnished.suppliers, 'supplier', work.em.create(Supplier, each));
+  for (const each of suppliers)
+    await note(work, furnished.suppliers, 'supplier', work.em.create(Supplier, each));
   for (const { supplier, ...each } of leathers) {
     const leather = work.em.create(Leather, {
       ...each,
@@ -73,36 +81,66 @@ async function furnishRooms(work: Work): Promise<Furnished> {
   }
   for (const { supplier, ...each } of hardware) {
     const supplierId = furnished.suppliers.id(supplier);
-    const part = work.em.create(Hardware, { ...each, unitPrice: new Decimal(each.unitPrice), supplierId });
+    const part = work.em.create(Hardware, {
+      ...each,
+      unitPrice: new Decimal(each.unitPrice),
+      supplierId,
+    });
     await note(work, furnished.hardware, 'hardware', part);
   }
   const createdAt = work.now.toISOString();
-  for (const each of customers) await note(work, furnished.customers, 'customer', work.em.create(Customer, { ...each, createdAt }));
+  for (const each of customers)
+    await note(
+      work,
+      furnished.customers,
+      'customer',
+      work.em.create(Customer, { ...each, createdAt }),
+    );
   furnished.taxRateId = await furnishTaxRate(work);
   return furnished;
 }
 
-async function note(work: Work, names: Named, subjectKind: string, made: { id: number; name: string }): Promise<void> {
+async function note(
+  work: Work,
+  names: Named,
+  subjectKind: string,
+  made: { id: number; name: string },
+): Promise<void> {
   await work.em.flush();
   names.set(made.name, made.id);
-  await logDeed(work, { action: `added ${subjectKind} ${made.name}`, subjectKind, subjectId: made.id });
+  await logDeed(work, {
+    action: `added ${subjectKind} ${made.name}`,
+    subjectKind,
+    subjectId: made.id,
+  });
 }
 
 async function furnishTaxRate(work: Work): Promise<number> {
   const { name, percent } = shopOf.taxRate;
   const rate = work.em.create(TaxRate, { name, percent: new Decimal(percent) });
   await work.em.flush();
-  await logDeed(work, { action: `entered the tax rate ${name} at ${percent} %`, subjectKind: 'tax rate', subjectId: rate.id });
+  await logDeed(work, {
+    action: `entered the tax rate ${name} at ${percent} %`,
+    subjectKind: 'tax rate',
+    subjectId: rate.id,
+  });
   return rate.id;
 }
 
-async function furnishPattern(shop: DemoShop, furnished: Furnished, pattern: (typeof patterns)[number]): Promise<void> {
+async function furnishPattern(
+  shop: DemoShop,
+  furnished: Furnished,
+  pattern: (typeof patterns)[number],
+): Promise<void> {
   const { leather, hardware: parts, ...rest } = pattern.definition;
   const definition: PatternDefinition = {
     ...rest,
     work: rest.work.kind === 'steps' ? { ...rest.work, steps: [...rest.work.steps] } : rest.work,
     leatherId: furnished.leathers.id(leather),
-    hardware: parts.map(({ name, perPiece }) => ({ hardwareId: furnished.hardware.id(name), perPiece })),
+    hardware: parts.map(({ name, perPiece }) => ({
+      hardwareId: furnished.hardware.id(name),
+      perPiece,
+    })),
   };
   const worked = await layoutFor(shop.context, definition);
   await shop.as('owner', async (work) => {

@@ -5,7 +5,8 @@ import { databaseFile, type Config } from '../../config.ts';
 import { closeContext, createContext } from '../../context.ts';
 import { lapseQuotes } from '../../flows/lapse-quotes.ts';
 import { OutgoingMail } from '../../modules/mail/outgoing-mail.entity.ts';
-import { dayIn, SetClock, systemClock } from '../../outside/clock.ts';
+import { dayIn } from '../../day-in.ts';
+import { SetClock, systemClock } from '../../outside/clock.ts';
 import { planPurchases } from './buy.ts';
 import { DemoShop } from './demo-shop.ts';
 import { furnish } from './furnish.ts';
@@ -60,7 +61,10 @@ async function playYear(config: Config): Promise<void> {
 /** The mail of the last week leaves when the demo starts; what is older has long been read. */
 async function letOldMailRest(shop: DemoShop, year: Year): Promise<void> {
   const em = shop.context.orm.em.fork();
-  for (const mail of await em.find(OutgoingMail, { state: 'waiting', createdAt: { $lt: `${year.day(7)}T00:00:00.000Z` } })) {
+  for (const mail of await em.find(OutgoingMail, {
+    state: 'waiting',
+    createdAt: { $lt: `${year.day(7)}T00:00:00.000Z` },
+  })) {
     mail.state = 'sent';
     mail.sentAt = mail.createdAt;
     mail.attempts = 1;

@@ -7,7 +7,7 @@ import { shipOrder } from '../../flows/ship-order.ts';
 import { Invoice } from '../../modules/invoices/invoice.entity.ts';
 import { addDays, addWorkdays } from '@hidewright/domain';
 import { moneyText } from '../../http/decimal-text.ts';
-import { reaches, type Played, type Stage } from './play-run.ts';
+import { reaches, type Played, type Stage } from './stage.ts';
 import type { DemoShop } from './demo-shop.ts';
 import type { Year } from './year.ts';
 
@@ -21,12 +21,17 @@ export function planBooks({ shop, year, furnished }: Stage, played: Played): voi
   if (!reaches(run, 'invoiced')) return;
   year.planOn(shipped, '16:10', () =>
     shop.as('bookkeeper', async (work) => {
-      const { id } = await draftInvoice(work, { orderId: played.orderId, taxRateId: furnished.taxRateId });
+      const { id } = await draftInvoice(work, {
+        orderId: played.orderId,
+        taxRateId: furnished.taxRateId,
+      });
       await issueInvoice(work, { invoiceId: id, issuedOn: work.today });
     }),
   );
   if (!reaches(run, 'part paid')) return;
-  year.planOn(addWorkdays(addDays(shipped, (run.paidAfter ?? 20) - 1), 1), '10:20', () => pay(shop, played));
+  year.planOn(addWorkdays(addDays(shipped, (run.paidAfter ?? 20) - 1), 1), '10:20', () =>
+    pay(shop, played),
+  );
 }
 
 function pay(shop: DemoShop, { run, orderId }: Played): Promise<void> {
@@ -34,14 +39,24 @@ function pay(shop: DemoShop, { run, orderId }: Played): Promise<void> {
     const invoice = await work.em.findOneOrFail(Invoice, { orderId });
     const share = run.fate === 'part paid' ? '0.5' : '1';
     const amount = moneyText(invoice.total.times(share).toDecimalPlaces(2, Decimal.ROUND_HALF_UP));
-    await recordPayment(work, { invoiceId: invoice.id, amount, receivedOn: work.today, method: run.method ?? 'bank', note: '' });
+    await recordPayment(work, {
+      invoiceId: invoice.id,
+      amount,
+      receivedOn: work.today,
+      method: run.method ?? 'bank',
+      note: '',
+    });
   });
 }
 
 /** Each month is locked in the week after it ends; the last full one still waits for the bookkeeper. */
 export function planLocks(shop: DemoShop, year: Year): void {
   const waiting = firstOfMonth(addDays(firstOfMonth(year.end), -1));
-  for (let fromDay = firstOfMonth(year.day(365)); fromDay < waiting; fromDay = firstOfMonth(addDays(fromDay, 32))) {
+  for (
+    let fromDay = firstOfMonth(year.day(365));
+    fromDay < waiting;
+    fromDay = firstOfMonth(addDays(fromDay, 32))
+  ) {
     const toDay = addDays(firstOfMonth(addDays(fromDay, 32)), -1);
     year.planOn(addDays(toDay, 5), '17:00', async () => {
       await shop.as('bookkeeper', (work) => lockPeriod(work, { fromDay, toDay }));

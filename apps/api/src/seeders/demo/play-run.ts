@@ -11,30 +11,11 @@ import { takeOnOrder } from '../../flows/take-on-order.ts';
 import { Order } from '../../modules/orders/order.entity.ts';
 import { Tool } from '../../modules/tools/tool.entity.ts';
 import type { DemoShop } from './demo-shop.ts';
-import type { Furnished } from './furnish.ts';
 import { planBooks } from './play-books.ts';
 import { planWork } from './play-work.ts';
 import { patterns } from './scenario/patterns.ts';
-import type { DemoRun, Fate } from './scenario/runs.ts';
-import type { Year } from './year.ts';
-
-/** One run while its part of the year is played. */
-export interface Played {
-  run: DemoRun;
-  quoteId: number;
-  orderId: number;
-}
-
-/** How far each fate goes; a fate includes all that comes before it. */
-const course: Fate[] = ['draft', 'sent', 'agreed', 'awaiting', 'ready', 'at the bench', 'packed', 'shipped', 'invoiced', 'part paid', 'paid'];
-
-export const reaches = ({ fate }: DemoRun, stage: Fate) => course.indexOf(fate) >= course.indexOf(stage);
-
-export interface Stage {
-  shop: DemoShop;
-  year: Year;
-  furnished: Furnished;
-}
+import type { DemoRun } from './scenario/runs.ts';
+import { reaches, type Played, type Stage } from './stage.ts';
 
 /** Plans one run from its enquiry to wherever it has come when the year ends. */
 export function planRun(stage: Stage, run: DemoRun): void {
@@ -53,7 +34,9 @@ function planOffer(stage: Stage, played: Played): void {
   year.planAfter(run.daysBefore, 1, '09:40', () => send(stage, played));
   if (run.fate === 'declined') {
     year.planAfter(run.daysBefore, 6, '15:00', async () => {
-      await shop.as('owner', (work) => declineQuote(work, { quoteId: played.quoteId, reason: 'The budget went elsewhere.' }));
+      await shop.as('owner', (work) =>
+        declineQuote(work, { quoteId: played.quoteId, reason: 'The budget went elsewhere.' }),
+      );
     });
   }
   if (!reaches(run, 'agreed')) return;
@@ -70,7 +53,9 @@ async function quote({ shop, year, furnished }: Stage, played: Played): Promise<
   const laid = await layPattern(shop.context, patternId);
   const customerId = furnished.customers.id(run.customer);
   const reorder = await plateFor(shop, customerId, patternId);
-  const needsPlate = patterns.some((pattern) => pattern.name === run.pattern && pattern.definition.needsPlate);
+  const needsPlate = patterns.some(
+    (pattern) => pattern.name === run.pattern && pattern.definition.needsPlate,
+  );
   const made = await shop.as('owner', (work) =>
     createQuote(
       work,
@@ -83,7 +68,10 @@ async function quote({ shop, year, furnished }: Stage, played: Played): Promise<
           quantity,
           typedPrice: quantity === run.chosen && run.typed !== undefined ? run.typed : null,
         })),
-        tooling: needsPlate && reorder === null ? [{ name: 'Stamp plate, magnesium', cost: '46.00', charge: '55.00' }] : [],
+        tooling:
+          needsPlate && reorder === null
+            ? [{ name: 'Stamp plate, magnesium', cost: '46.00', charge: '55.00' }]
+            : [],
         message: '',
         overrides: {},
       },
@@ -100,7 +88,9 @@ async function send({ shop }: Stage, { quoteId }: Played): Promise<void> {
   const { host, port, publicUrl } = shop.context.config;
   const drawn = await putQuoteOnPaper(shop.context, shop.person('owner'), quoteId);
   const origin = publicUrl ?? `http://${host}:${port}`;
-  await shop.as('owner', (work) => sendQuote(work, quoteId, { by: 'mail', origin, mailAvailable: true }, drawn));
+  await shop.as('owner', (work) =>
+    sendQuote(work, quoteId, { by: 'mail', origin, mailAvailable: true }, drawn),
+  );
 }
 
 /** The first run of a design waits for its proof and its plate; a reorder has both. */
@@ -120,7 +110,9 @@ async function takeOn({ shop, year, furnished }: Stage, played: Played): Promise
   const { run, quoteId } = played;
   const customerId = furnished.customers.id(run.customer);
   const patternId = furnished.patterns.id(run.pattern);
-  const needsPlate = patterns.some((pattern) => pattern.name === run.pattern && pattern.definition.needsPlate);
+  const needsPlate = patterns.some(
+    (pattern) => pattern.name === run.pattern && pattern.definition.needsPlate,
+  );
   const plateToOrder = needsPlate && (await plateFor(shop, customerId, patternId)) === null;
   await shop.as('owner', async (work) => {
     if (plateToOrder) await orderPlate(work, { run, customerId, patternId });
@@ -156,13 +148,24 @@ async function orderPlate(
 async function receivePlate(shop: DemoShop, { orderId }: Played): Promise<void> {
   await shop.as('owner', async (work) => {
     const order = await work.em.findOneOrFail(Order, orderId);
-    for (const plate of await work.em.find(Tool, { customerId: order.customerId, state: 'on order' })) {
-      await changeTool(work, { id: plate.id, ifMatch: plate.version, change: { state: 'on the rack' } });
+    for (const plate of await work.em.find(Tool, {
+      customerId: order.customerId,
+      state: 'on order',
+    })) {
+      await changeTool(work, {
+        id: plate.id,
+        ifMatch: plate.version,
+        change: { state: 'on the rack' },
+      });
     }
   });
 }
 
-async function arrive(shop: DemoShop, { orderId }: Played, what: 'proof' | 'tooling'): Promise<void> {
+async function arrive(
+  shop: DemoShop,
+  { orderId }: Played,
+  what: 'proof' | 'tooling',
+): Promise<void> {
   await shop.as('owner', async (work) => {
     const order = await work.em.findOneOrFail(Order, orderId);
     if (order.awaits.includes(what)) await noteArrival(work, orderId, what);

@@ -9,7 +9,7 @@ import type { JobStep } from '../../modules/jobs/job-step.entity.ts';
 import { piecesSpoiled, stepLimits } from '../../modules/jobs/step-limits.ts';
 import { Reservation } from '../../modules/stock/reservation.entity.ts';
 import type { Work } from '../../work.ts';
-import type { Played, Stage } from './play-run.ts';
+import type { Played, Stage } from './stage.ts';
 import type { DemoRun } from './scenario/runs.ts';
 
 /** The maker takes what is held on the first day, works the steps over three, and finishes on the third. */
@@ -17,7 +17,9 @@ export function planWork({ shop, year }: Stage, played: Played): void {
   const { run } = played;
   const at = (days: number, time: string, useCase: (work: Work, job: Job) => Promise<void>) =>
     year.planAfter(...first(run, days), time, () =>
-      shop.as('maker', async (work) => useCase(work, await work.em.findOneOrFail(Job, { orderId: played.orderId }))),
+      shop.as('maker', async (work) =>
+        useCase(work, await work.em.findOneOrFail(Job, { orderId: played.orderId })),
+      ),
     );
   at(0, '08:30', takeHeld);
   at(0, '11:50', (work, job) => workSteps(work, job, run, 0, 2));
@@ -34,13 +36,23 @@ function first(run: DemoRun, days: number): [daysBefore: number, workdays: numbe
 }
 
 async function takeHeld(work: Work, job: Job): Promise<void> {
-  for (const { lotId, hardwareId, open } of await work.em.find(Reservation, { jobId: job.id, open: { $gt: 0 } })) {
-    if (lotId !== null) await takeForJob(work, job.id, { lotId, areaMm2: unscaled(open, 3).toString() });
+  for (const { lotId, hardwareId, open } of await work.em.find(Reservation, {
+    jobId: job.id,
+    open: { $gt: 0 },
+  })) {
+    if (lotId !== null)
+      await takeForJob(work, job.id, { lotId, areaMm2: unscaled(open, 3).toString() });
     if (hardwareId !== null) await takeForJob(work, job.id, { hardwareId, quantity: open });
   }
 }
 
-async function workSteps(work: Work, job: Job, run: DemoRun, from: number, until: number): Promise<void> {
+async function workSteps(
+  work: Work,
+  job: Job,
+  run: DemoRun,
+  from: number,
+  until: number,
+): Promise<void> {
   for (const { id } of (await stepsOf(work.em, job.id)).slice(from, until)) {
     const steps = await stepsOf(work.em, job.id);
     const at = steps.findIndex((step) => step.id === id);
@@ -63,11 +75,17 @@ function spoiledAt(step: JobStep, limit: number, run: DemoRun): number {
   return share.times(limit).toDecimalPlaces(0, Decimal.ROUND_HALF_UP).toNumber();
 }
 
-const minutesOf = (step: JobStep, run: DemoRun) => step.plannedMinutes.times(run.slower).toDecimalPlaces(0, Decimal.ROUND_HALF_UP).toString();
+const minutesOf = (step: JobStep, run: DemoRun) =>
+  step.plannedMinutes.times(run.slower).toDecimalPlaces(0, Decimal.ROUND_HALF_UP).toString();
 
 /** What was ordered and a few over; one piece in fifty passes as a second. */
 async function finish(work: Work, job: Job, run: DemoRun): Promise<void> {
   const left = job.cutCount - piecesSpoiled(await stepsOf(work.em, job.id));
   const seconds = Math.min(Math.floor(run.chosen / 50), Math.max(0, left - run.chosen));
-  await finishJob(work, job.id, { good: left - seconds, seconds, leatherLeft: [], hardwareLeft: [] });
+  await finishJob(work, job.id, {
+    good: left - seconds,
+    seconds,
+    leatherLeft: [],
+    hardwareLeft: [],
+  });
 }

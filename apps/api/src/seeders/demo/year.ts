@@ -28,7 +28,12 @@ export class Year {
   }
 
   /** So many working days after a day that is told by how many days before the end it was. */
-  planAfter(daysBefore: number, workdays: number, time: string, happens: () => Promise<void>): void {
+  planAfter(
+    daysBefore: number,
+    workdays: number,
+    time: string,
+    happens: () => Promise<void>,
+  ): void {
     this.planOn(addWorkdays(this.day(daysBefore), workdays), time, happens);
   }
 

@@ -1,7 +1,7 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import type { ApiProblem } from '../../lib/api-problem.ts';
 
-type Outbox = typeof import('./log-outbox.ts');
+type Outbox = Awaited<ReturnType<typeof open>>;
 
 const stored = new Map<string, string>();
 let keys: string[];
@@ -12,7 +12,7 @@ const refusal = (status: number, detail: string) =>
   new Response(JSON.stringify({ type: 'about:blank', title: 'No', status, detail }), { status });
 
 /** As after the page was opened anew: what is stored stays. */
-async function open(): Promise<Outbox> {
+async function open() {
   vi.resetModules();
   return import('./log-outbox.ts');
 }

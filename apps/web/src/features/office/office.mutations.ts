@@ -4,7 +4,9 @@ import { sessionKey } from '../../lib/query-client.ts';
 
 /** The shop's name, units and currency stand in the session as well. */
 export function useChangeWorkshop() {
-  return useSend(changeWorkshop, { invalidates: [['workshop'], sessionKey, ['activities'], ['today']] });
+  return useSend(changeWorkshop, {
+    invalidates: [['workshop'], sessionKey, ['activities'], ['today']],
+  });
 }
 
 export function useAddPerson() {

@@ -1,6 +1,6 @@
 import type { LayoutReply } from '@hidewright/contract';
 import type { KeyFigure } from '../../components/key-figures.tsx';
-import { areaText, countText, lengthText, percentText } from '../../lib/formatting.ts';
+import { areaText, countText, lengthText, percentText, sizeText } from '../../lib/formatting.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
 type Units = Pick<Workshop, 'areaUnit' | 'lengthUnit'>;
@@ -28,6 +28,15 @@ export function layoutFigures(layout: LayoutReply, { areaUnit, lengthUnit }: Uni
   const mm = (value: number) =>
     lengthText(value.toFixed(4), lengthUnit, lengthUnit === 'mm' ? 1 : 3);
   const figures: (KeyFigure | false)[] = [
+    layout.by === 'hand count' &&
+      layout.container.form === 'panel' && {
+        word: 'panel',
+        figure: sizeText(
+          String(layout.container.widthMm),
+          String(layout.container.heightMm),
+          lengthUnit,
+        ),
+      },
     layout.yieldPercent !== null && {
       word: 'yield',
       figure: percentText(layout.yieldPercent),

@@ -55,7 +55,14 @@ export const patterns = [
     name: 'Luggage tag with neck',
     definition: {
       layoutBy: 'outline',
-      outline: { shape: 'tag', lengthMm: '112', widthMm: '62', neckLengthMm: '26', neckWidthMm: '26', cornerRadiusMm: '9' },
+      outline: {
+        shape: 'tag',
+        lengthMm: '112',
+        widthMm: '62',
+        neckLengthMm: '26',
+        neckWidthMm: '26',
+        cornerRadiusMm: '9',
+      },
       handCount: null,
       container: panel,
       ...spaced,

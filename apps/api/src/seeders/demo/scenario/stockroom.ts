@@ -1,27 +1,120 @@
 import type { LotForm } from '@hidewright/contract';
 
 export const suppliers = [
-  { name: 'Oldbeck Tannery', email: 'hides@oldbeck.example.com', phone: '555-0111', leadDays: 9, note: 'Sides by the foot, measured on the flesh side.' },
-  { name: 'Fennbridge Fittings', email: 'orders@fennbridge-fittings.example.com', phone: '555-0112', leadDays: 3, note: '' },
-  { name: 'Kettlewell Engravers', email: 'plates@kettlewell.example.com', phone: '555-0113', leadDays: 5, note: 'Magnesium, copper and brass plates; mirrored artwork.' },
-  { name: 'Straightedge Dies', email: 'dies@straightedge.example.com', phone: '555-0114', leadDays: 10, note: '' },
+  {
+    name: 'Oldbeck Tannery',
+    email: 'hides@oldbeck.example.com',
+    phone: '555-0111',
+    leadDays: 9,
+    note: 'Sides by the foot, measured on the flesh side.',
+  },
+  {
+    name: 'Fennbridge Fittings',
+    email: 'orders@fennbridge-fittings.example.com',
+    phone: '555-0112',
+    leadDays: 3,
+    note: '',
+  },
+  {
+    name: 'Kettlewell Engravers',
+    email: 'plates@kettlewell.example.com',
+    phone: '555-0113',
+    leadDays: 5,
+    note: 'Magnesium, copper and brass plates; mirrored artwork.',
+  },
+  {
+    name: 'Straightedge Dies',
+    email: 'dies@straightedge.example.com',
+    phone: '555-0114',
+    leadDays: 10,
+    note: '',
+  },
 ] as const;
 type SupplierName = (typeof suppliers)[number]['name'];
 
 export const leathers = [
-  { name: 'Oak tan russet 5–6 oz', tannage: 'oak bark', colour: 'russet', finish: 'waxed', weightLowOz: '5', weightHighOz: '6', pricePerFt2: '9.50', supplier: 'Oldbeck Tannery' },
-  { name: 'Oak tan natural 7–8 oz', tannage: 'oak bark', colour: 'natural', finish: 'unfinished', weightLowOz: '7', weightHighOz: '8', pricePerFt2: '11.80', supplier: 'Oldbeck Tannery' },
-  { name: 'Chestnut lining 3–4 oz', tannage: 'chestnut', colour: 'dark brown', finish: 'glazed', weightLowOz: '3', weightHighOz: '4', pricePerFt2: '8.40', supplier: 'Oldbeck Tannery' },
+  {
+    name: 'Oak tan russet 5–6 oz',
+    tannage: 'oak bark',
+    colour: 'russet',
+    finish: 'waxed',
+    weightLowOz: '5',
+    weightHighOz: '6',
+    pricePerFt2: '9.50',
+    supplier: 'Oldbeck Tannery',
+  },
+  {
+    name: 'Oak tan natural 7–8 oz',
+    tannage: 'oak bark',
+    colour: 'natural',
+    finish: 'unfinished',
+    weightLowOz: '7',
+    weightHighOz: '8',
+    pricePerFt2: '11.80',
+    supplier: 'Oldbeck Tannery',
+  },
+  {
+    name: 'Chestnut lining 3–4 oz',
+    tannage: 'chestnut',
+    colour: 'dark brown',
+    finish: 'glazed',
+    weightLowOz: '3',
+    weightHighOz: '4',
+    pricePerFt2: '8.40',
+    supplier: 'Oldbeck Tannery',
+  },
 ] as const satisfies { supplier: SupplierName; [field: string]: string }[];
 export type LeatherName = (typeof leathers)[number]['name'];
 
 export const hardware = [
-  { name: 'Rivets 7 mm, antique brass', kind: 'hardware', unitPrice: '0.11', packSize: 100, reorderAt: 300, supplier: 'Fennbridge Fittings' },
-  { name: 'D-rings 25 mm, solid brass', kind: 'hardware', unitPrice: '0.38', packSize: 50, reorderAt: 100, supplier: 'Fennbridge Fittings' },
-  { name: 'Buckles 20 mm, solid brass', kind: 'hardware', unitPrice: '0.62', packSize: 25, reorderAt: 100, supplier: 'Fennbridge Fittings' },
-  { name: 'Snaps, line 20, brass', kind: 'hardware', unitPrice: '0.24', packSize: 100, reorderAt: 300, supplier: 'Fennbridge Fittings' },
-  { name: 'Split rings 12 mm, nickel', kind: 'hardware', unitPrice: '0.07', packSize: 200, reorderAt: 200, supplier: 'Fennbridge Fittings' },
-  { name: 'Card sleeves, kraft', kind: 'supplies', unitPrice: '0.09', packSize: 250, reorderAt: 250, supplier: 'Fennbridge Fittings' },
+  {
+    name: 'Rivets 7 mm, antique brass',
+    kind: 'hardware',
+    unitPrice: '0.11',
+    packSize: 100,
+    reorderAt: 300,
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'D-rings 25 mm, solid brass',
+    kind: 'hardware',
+    unitPrice: '0.38',
+    packSize: 50,
+    reorderAt: 100,
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'Buckles 20 mm, solid brass',
+    kind: 'hardware',
+    unitPrice: '0.62',
+    packSize: 25,
+    reorderAt: 100,
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'Snaps, line 20, brass',
+    kind: 'hardware',
+    unitPrice: '0.24',
+    packSize: 100,
+    reorderAt: 300,
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'Split rings 12 mm, nickel',
+    kind: 'hardware',
+    unitPrice: '0.07',
+    packSize: 200,
+    reorderAt: 200,
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'Card sleeves, kraft',
+    kind: 'supplies',
+    unitPrice: '0.09',
+    packSize: 250,
+    reorderAt: 250,
+    supplier: 'Fennbridge Fittings',
+  },
 ] as const satisfies { supplier: SupplierName; [field: string]: string | number }[];
 export type HardwareName = (typeof hardware)[number]['name'];
 
@@ -38,8 +131,18 @@ export const purchases: Purchase[] = [
     daysBefore: 372,
     supplier: 'Oldbeck Tannery',
     leather: [
-      { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['22.5', '24.2'], shade: 'red-brown' },
-      { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['23.1', '21.7', '24.4'], shade: 'pale' },
+      {
+        name: 'Oak tan russet 5–6 oz',
+        form: 'side',
+        areasFt2: ['22.5', '24.2'],
+        shade: 'red-brown',
+      },
+      {
+        name: 'Oak tan natural 7–8 oz',
+        form: 'side',
+        areasFt2: ['23.1', '21.7', '24.4'],
+        shade: 'pale',
+      },
       { name: 'Chestnut lining 3–4 oz', form: 'side', areasFt2: ['20.4', '21.2'], shade: 'dark' },
     ],
   },
@@ -55,35 +158,74 @@ export const purchases: Purchase[] = [
       { name: 'Card sleeves, kraft', quantity: 1500 },
     ],
   },
-  { daysBefore: 270, supplier: 'Oldbeck Tannery', leather: [
-    { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['23.8'], shade: 'red-brown' },
-    { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['24.6', '22.9', '23.7'], shade: 'pale' },
-  ] },
-  { daysBefore: 205, supplier: 'Fennbridge Fittings', hardware: [
-    { name: 'Rivets 7 mm, antique brass', quantity: 1000 },
-    { name: 'Snaps, line 20, brass', quantity: 1000 },
-    { name: 'Card sleeves, kraft', quantity: 1000 },
-  ] },
-  { daysBefore: 168, supplier: 'Oldbeck Tannery', leather: [
-    { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['21.9', '23.3'], shade: 'a shade lighter' },
-    { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['22.1', '24.8'], shade: 'pale' },
-    { name: 'Chestnut lining 3–4 oz', form: 'side', areasFt2: ['19.8', '20.6'], shade: 'dark' },
-  ] },
-  { daysBefore: 96, supplier: 'Oldbeck Tannery', leather: [
-    { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['23.4', '24.1', '22.8'], shade: 'pale' },
-    { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['22.2'], shade: 'red-brown' },
-  ] },
-  { daysBefore: 60, supplier: 'Fennbridge Fittings', hardware: [
-    { name: 'Rivets 7 mm, antique brass', quantity: 600 },
-    { name: 'D-rings 25 mm, solid brass', quantity: 100 },
-    { name: 'Buckles 20 mm, solid brass', quantity: 200 },
-    { name: 'Snaps, line 20, brass', quantity: 600 },
-    { name: 'Card sleeves, kraft', quantity: 750 },
-  ] },
-  { daysBefore: 31, supplier: 'Oldbeck Tannery', leather: [
-    { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['24.4'], shade: 'red-brown' },
-    { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['22.6', '23.2'], shade: 'pale' },
-  ] },
+  {
+    daysBefore: 270,
+    supplier: 'Oldbeck Tannery',
+    leather: [
+      { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['23.8'], shade: 'red-brown' },
+      {
+        name: 'Oak tan natural 7–8 oz',
+        form: 'side',
+        areasFt2: ['24.6', '22.9', '23.7'],
+        shade: 'pale',
+      },
+    ],
+  },
+  {
+    daysBefore: 205,
+    supplier: 'Fennbridge Fittings',
+    hardware: [
+      { name: 'Rivets 7 mm, antique brass', quantity: 1000 },
+      { name: 'Snaps, line 20, brass', quantity: 1000 },
+      { name: 'Card sleeves, kraft', quantity: 1000 },
+    ],
+  },
+  {
+    daysBefore: 168,
+    supplier: 'Oldbeck Tannery',
+    leather: [
+      {
+        name: 'Oak tan russet 5–6 oz',
+        form: 'side',
+        areasFt2: ['21.9', '23.3'],
+        shade: 'a shade lighter',
+      },
+      { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['22.1', '24.8'], shade: 'pale' },
+      { name: 'Chestnut lining 3–4 oz', form: 'side', areasFt2: ['19.8', '20.6'], shade: 'dark' },
+    ],
+  },
+  {
+    daysBefore: 96,
+    supplier: 'Oldbeck Tannery',
+    leather: [
+      {
+        name: 'Oak tan natural 7–8 oz',
+        form: 'side',
+        areasFt2: ['23.4', '24.1', '22.8'],
+        shade: 'pale',
+      },
+      { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['22.2'], shade: 'red-brown' },
+    ],
+  },
+  {
+    daysBefore: 60,
+    supplier: 'Fennbridge Fittings',
+    hardware: [
+      { name: 'Rivets 7 mm, antique brass', quantity: 600 },
+      { name: 'D-rings 25 mm, solid brass', quantity: 100 },
+      { name: 'Buckles 20 mm, solid brass', quantity: 200 },
+      { name: 'Snaps, line 20, brass', quantity: 600 },
+      { name: 'Card sleeves, kraft', quantity: 750 },
+    ],
+  },
+  {
+    daysBefore: 31,
+    supplier: 'Oldbeck Tannery',
+    leather: [
+      { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['24.4'], shade: 'red-brown' },
+      { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['22.6', '23.2'], shade: 'pale' },
+    ],
+  },
 ];
 
 /** Ordered near the end of the year and not here yet. */

@@ -29,11 +29,15 @@ export function Component() {
   const { data: session } = useSuspenseQuery(sessionQuery());
   const [quantity, choose] = useQuantity(quote);
   const isOwner = session.person?.role === 'owner';
+  const isMaker = session.person?.role === 'maker';
   const rung = quote.numbers?.breaks.find((each) => each.quantity === quantity);
   return (
     <>
       <PageTitle>{`Quote ${quote.number}`}</PageTitle>
-      <QuoteTicket quote={quote} actions={isOwner && <QuoteActions quote={quote} />} />
+      <QuoteTicket
+        quote={quote}
+        actions={!isMaker && <QuoteActions quote={quote} isOwner={isOwner} />}
+      />
       <Stitch className="my-5" />
       {isOwner && quote.state === 'agreed' && (
         <AcceptRun quote={quote} quantity={quantity} className="mb-5" />
@@ -61,7 +65,7 @@ export function Component() {
         <div className="space-y-5 lg:col-span-2 xl:col-span-1">
           <CustomerAnswer quote={quote} quantity={quantity} isOwner={isOwner} />
           {isOwner && quote.state !== 'agreed' && <AcceptRun quote={quote} quantity={quantity} />}
-          {session.person?.role === 'maker' && (
+          {isMaker && (
             <CanWeMakeIt quoteId={quote.id} quantity={quantity} by={quote.inHandsOn ?? undefined} />
           )}
           <OtherRevisions quote={quote} />

@@ -19,7 +19,10 @@ export function Component() {
       <PageHeader title="Office" subtitle="The shop and its starting values" />
       <OfficeNav />
       <Card className="max-w-2xl">
-        <WorkshopForm workshop={workshop} onReload={async () => (await refetch()).data ?? workshop} />
+        <WorkshopForm
+          workshop={workshop}
+          onReload={async () => (await refetch()).data ?? workshop}
+        />
       </Card>
     </>
   );

@@ -13,7 +13,8 @@ export async function loader() {
 }
 
 export function Component() {
-  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useSuspenseInfiniteQuery(activitiesQuery());
+  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } =
+    useSuspenseInfiniteQuery(activitiesQuery());
   return (
     <>
       <PageHeader title="Who did what" subtitle="Written once, never changed" />

@@ -32,7 +32,7 @@ export function Component() {
       />
       <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
         <div className="grid gap-5">
-          <Card title="On the rack">
+          <Card title="Wear and place">
             <Facts tool={tool} />
           </Card>
           {session.person?.role === 'owner' && (

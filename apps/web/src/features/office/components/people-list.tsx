@@ -21,7 +21,14 @@ const columns: readonly Column<Person>[] = [
 
 export function PeopleList({ people }: { people: readonly Person[] }) {
   return (
-    <DataTable label="Who signs in" rows={people} rowId={(person) => person.id} columns={columns} empty={null} sortedBy={{ id: 'name' }} />
+    <DataTable
+      label="Who signs in"
+      rows={people}
+      rowId={(person) => person.id}
+      columns={columns}
+      empty={null}
+      sortedBy={{ id: 'name' }}
+    />
   );
 }
 
@@ -31,8 +38,12 @@ function Access({ person }: { person: Person }) {
     send.mutate(
       { params: { id: person.id }, body: { active }, ifMatch: person.version },
       {
-        onSuccess: () => say(active ? `${person.name} can sign in again.` : `${person.name} can no longer sign in.`),
-        onError: (error) => say(error instanceof ApiProblem ? error.detail : 'That did not work. Try again.'),
+        onSuccess: () =>
+          say(
+            active ? `${person.name} can sign in again.` : `${person.name} can no longer sign in.`,
+          ),
+        onError: (error) =>
+          say(error instanceof ApiProblem ? error.detail : 'That did not work. Try again.'),
       },
     );
   return (

@@ -21,14 +21,23 @@ const lengthUnits = [
   { value: 'mm', label: 'millimetres (mm)' },
   { value: 'in', label: 'inches (in)' },
 ];
-const currencyChoices = currencies.map(({ code, name }) => ({ value: code, label: `${code}, ${name}` }));
+const currencyChoices = currencies.map(({ code, name }) => ({
+  value: code,
+  label: `${code}, ${name}`,
+}));
 const timeZones = [...new Set(['UTC', ...Intl.supportedValuesOf('timeZone')])].map((zone) => ({
   value: zone,
   label: zone.replaceAll('_', ' '),
 }));
 
 /** The values that quotes, checks and papers begin with; each quote keeps those it was made with. */
-export function WorkshopForm({ workshop, onReload }: { workshop: Workshop; onReload: () => Promise<Workshop> }) {
+export function WorkshopForm({
+  workshop,
+  onReload,
+}: {
+  workshop: Workshop;
+  onReload: () => Promise<Workshop>;
+}) {
   const send = useChangeWorkshop();
   return (
     <Form
@@ -46,18 +55,43 @@ export function WorkshopForm({ workshop, onReload }: { workshop: Workshop; onRel
       <SelectField name="currency" label="Currency" choices={currencyChoices} />
       <SelectField name="areaUnit" label="Leather is measured in" choices={areaUnits} short />
       <SelectField name="lengthUnit" label="Lengths are typed in" choices={lengthUnits} short />
-      <SelectField name="timeZone" label="Time zone" help="Days begin and end by it." choices={timeZones} />
+      <SelectField
+        name="timeZone"
+        label="Time zone"
+        help="Days begin and end by it."
+        choices={timeZones}
+      />
       <Stitch />
       <h2>What an hour should earn</h2>
-      <MoneyField name="targetPerHour" label="Target per bench hour" per="hour" help="What a bench hour should leave, before wages." />
+      <MoneyField
+        name="targetPerHour"
+        label="Target per bench hour"
+        per="hour"
+        help="What a bench hour should leave, before wages."
+      />
       <MoneyField name="wagePerHour" label="Wage" per="hour" />
-      <NumberField name="deskMinutesPerOrder" label="Desk time of an order" unit="min" help="Mail, files, packing and selling." />
+      <NumberField
+        name="deskMinutesPerOrder"
+        label="Desk time of an order"
+        unit="min"
+        help="Mail, files, packing and selling."
+      />
       <MoneyField name="packingPerOrder" label="Packing" per="order" />
       <MoneyField name="priceStep" label="Prices go in steps of" />
-      <DecimalField name="benchHoursPerDay" label="Bench hours a day" unit="h" help="All hands together, desk time taken off." />
+      <DecimalField
+        name="benchHoursPerDay"
+        label="Bench hours a day"
+        unit="h"
+        help="All hands together, desk time taken off."
+      />
       <Stitch />
       <h2>Starting values of a pattern</h2>
-      <DecimalField name="rejectPercent" label="Rejects" unit="%" help="Until the shop’s own runs say otherwise." />
+      <DecimalField
+        name="rejectPercent"
+        label="Rejects"
+        unit="%"
+        help="Until the shop’s own runs say otherwise."
+      />
       <DecimalField
         name="confidencePercent"
         label="How sure a cut count should be"
@@ -68,7 +102,12 @@ export function WorkshopForm({ workshop, onReload }: { workshop: Workshop; onRel
       <LengthField name="trimMm" label="Trim at the edges" />
       <Stitch />
       <h2>Terms</h2>
-      <DecimalField name="depositPercent" label="Deposit asked for" unit="%" help="0 asks for none." />
+      <DecimalField
+        name="depositPercent"
+        label="Deposit asked for"
+        unit="%"
+        help="0 asks for none."
+      />
       <NumberField name="quoteValidDays" label="A quote holds for" unit="days" />
       <NumberField name="paymentTermDays" label="Payment within" unit="days" />
       <TextField name="taxNumber" label="Tax number" short optional />

@@ -14,7 +14,7 @@ const columns: Column<PatternSummary>[] = [
     header: 'Pattern',
     value: (row) => row.name,
     cell: (row) => (
-      <span className="inline-flex items-center gap-3">
+      <span className="inline-flex items-center gap-3 align-middle">
         <OutlineMark path={row.outlinePath} />
         <TextLink to={`/pattern-room/patterns/${row.id}`}>{row.name}</TextLink>
       </span>
@@ -27,14 +27,14 @@ const columns: Column<PatternSummary>[] = [
     id: 'pieces',
     header: 'Pieces',
     value: (row) => row.pieces,
-    cell: (row) => (row.pieces === null ? '' : piecesWords(row.pieces, row.form)),
+    cell: (row) => (row.pieces === null ? '–' : piecesWords(row.pieces, row.form)),
     align: 'right',
   },
   {
     id: 'yield',
     header: 'Yield',
     value: (row) => row.yieldPercent,
-    cell: (row) => (row.yieldPercent === null ? '' : percentText(row.yieldPercent)),
+    cell: (row) => (row.yieldPercent === null ? '–' : percentText(row.yieldPercent)),
     align: 'right',
   },
   {

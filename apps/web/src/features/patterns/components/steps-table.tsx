@@ -31,9 +31,9 @@ export function StepsTable({ steps }: { steps: Steps }) {
             <th scope="row" className="py-1.5 text-left font-semibold">
               {`${at + 1} ${step.name}`}
             </th>
-            <td className={right}>{minutesText(step.setupMinutes)}</td>
+            <td className={`${right} whitespace-nowrap`}>{minutesText(step.setupMinutes)}</td>
             <td className={right}>{`${numberText(step.secondsPerUnit, 2)} s per ${step.per}`}</td>
-            <td className={right}>{percentText(step.rejectPercent)}</td>
+            <td className={`${right} whitespace-nowrap`}>{percentText(step.rejectPercent)}</td>
           </tr>
         ))}
       </tbody>

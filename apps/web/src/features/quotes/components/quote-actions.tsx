@@ -9,8 +9,23 @@ import { useReviseQuote } from '../quotes.mutations.ts';
 import { orSayWhy } from './or-say-why.ts';
 import { SendDialog } from './send-dialog.tsx';
 
-/** What the owner can do with the whole quote, by its state; agreeing and declining stand with the answer. */
-export function QuoteActions({ quote }: { quote: Quote }) {
+/** What can be done with the whole quote, by its state; agreeing and declining stand with the answer. */
+export function QuoteActions({ quote, isOwner }: { quote: Quote; isOwner: boolean }) {
+  return (
+    <>
+      {isOwner && <OwnersActions quote={quote} />}
+      <a
+        href={addressOf(quotePaper, { params: { id: quote.id } })}
+        download
+        className={buttonLook({})}
+      >
+        PDF
+      </a>
+    </>
+  );
+}
+
+function OwnersActions({ quote }: { quote: Quote }) {
   const [sending, setSending] = useState(false);
   const out = quote.state === 'sent' || quote.state === 'agreed';
   return (
@@ -25,13 +40,6 @@ export function QuoteActions({ quote }: { quote: Quote }) {
       )}
       {out && <Button onClick={() => setSending(true)}>Send again</Button>}
       <ReviseButton quote={quote} />
-      <a
-        href={addressOf(quotePaper, { params: { id: quote.id } })}
-        download
-        className={buttonLook({})}
-      >
-        PDF
-      </a>
       <SendDialog quote={quote} open={sending} onOpenChange={setSending} />
     </>
   );

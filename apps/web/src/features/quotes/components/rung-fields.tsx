@@ -63,7 +63,8 @@ function RungRow({ at, workedOut, onRemove }: RungRowProps) {
       <div className="w-44">
         <MoneyField
           name={`breaks.${at}.typedPrice`}
-          label="Your price each"
+          label="Your price"
+          per="piece"
           optional
           whenEmpty="null"
         />

@@ -37,18 +37,44 @@ function Picture({ earned }: { earned: Earned }) {
   const y = (value: number) => height - (Math.max(0, value) / top) * height;
   const step = width / Math.max(earned.jobs.length, 6);
   return (
-    <svg viewBox={`0 0 ${width} ${height + 4}`} className="w-full" role="img" aria-label={describe(earned)}>
+    <svg
+      viewBox={`0 0 ${width} ${height + 4}`}
+      className="w-full"
+      role="img"
+      aria-label={describe(earned)}
+    >
       {earned.jobs.map((job, index) => {
         const x = index * step + step * 0.2;
         const bench = Number(job.perBenchHour);
         return (
           <g key={job.number}>
-            <rect x={x} y={y(bench)} width={step * 0.55} height={height - y(bench)} rx={2} className="fill-verdigris" />
-            <rect x={x - 2} y={y(Number(job.perHourAllIn)) - 1.5} width={step * 0.55 + 4} height={3} className="fill-ink" />
+            <rect
+              x={x}
+              y={y(bench)}
+              width={step * 0.55}
+              height={height - y(bench)}
+              rx={2}
+              className="fill-verdigris"
+            />
+            <rect
+              x={x - 2}
+              y={y(Number(job.perHourAllIn)) - 1.5}
+              width={step * 0.55 + 4}
+              height={3}
+              className="fill-ink"
+            />
           </g>
         );
       })}
-      <line x1={0} x2={width} y1={y(target)} y2={y(target)} strokeDasharray="6 4" strokeWidth={1.5} className="stroke-brass" />
+      <line
+        x1={0}
+        x2={width}
+        y1={y(target)}
+        y2={y(target)}
+        strokeDasharray="6 4"
+        strokeWidth={1.5}
+        className="stroke-brass"
+      />
       <text x={2} y={y(target) - 5} className="fill-brass text-[12px]">
         target {Number(earned.target)}
       </text>
@@ -62,9 +88,15 @@ function Figures({ earned, today }: { earned: Earned; today: string }) {
     <table className="mt-2 w-full">
       <thead className="text-left text-ink-soft">
         <tr>
-          <th scope="col" className="font-normal">run</th>
-          <th scope="col" className="text-right font-normal">bench</th>
-          <th scope="col" className="text-right font-normal">all in</th>
+          <th scope="col" className="font-normal">
+            run
+          </th>
+          <th scope="col" className="text-right font-normal">
+            bench
+          </th>
+          <th scope="col" className="text-right font-normal">
+            all in
+          </th>
         </tr>
       </thead>
       <tbody>

@@ -39,7 +39,8 @@ export function FourWeeks({ weeks }: { weeks: FourWeeksOfToday }) {
       )}
       {late.length > 0 && (
         <Notice tone="attention" className="mt-4" title={lateTitle(late)}>
-          The bench hours left do not reach its promised day. Work it first, or agree on a later day.
+          The bench hours left do not reach its promised day. Work it first, or agree on a later
+          day.
         </Notice>
       )}
     </Card>
@@ -62,11 +63,20 @@ function JobRow({ job, from }: { job: PromisedJob; from: string }) {
       </div>
       <div className="relative mt-2 h-2.5 sm:mt-0" aria-hidden="true">
         <div
-          className={classNames('absolute inset-y-0 flex gap-1', job.late ? 'text-oxblood' : 'text-verdigris')}
+          className={classNames(
+            'absolute inset-y-0 flex gap-1',
+            job.late ? 'text-oxblood' : 'text-verdigris',
+          )}
           style={{ left: share(start), width: share(end - start) }}
         >
           {stitches(end - start, job).map((done, index) => (
-            <span key={index} className={classNames('h-full flex-1 rounded-sm bg-current', !done && !job.late && 'opacity-40')} />
+            <span
+              key={index}
+              className={classNames(
+                'h-full flex-1 rounded-sm bg-current',
+                !done && !job.late && 'opacity-40',
+              )}
+            />
           ))}
         </div>
       </div>
@@ -87,4 +97,5 @@ function lateTitle(late: readonly PromisedJob[]): string {
 const dayMs = 86_400_000;
 const utc = (day: string) => Date.parse(`${day}T00:00:00Z`);
 const daysBetween = (from: string, to: string) => Math.round((utc(to) - utc(from)) / dayMs);
-const dayAfter = (day: string, days: number) => new Date(utc(day) + days * dayMs).toISOString().slice(0, 10);
+const dayAfter = (day: string, days: number) =>
+  new Date(utc(day) + days * dayMs).toISOString().slice(0, 10);

@@ -8,7 +8,11 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 export function Owed({ owed }: { owed: NonNullable<Today['owed']> }) {
   const { currency } = useWorkshop();
   return (
-    <Card title="Owed to us" subtitle={`by age, ${currency}`} aside={<TextLink to="/books">Books</TextLink>}>
+    <Card
+      title="Owed to us"
+      subtitle={`by age, ${currency}`}
+      aside={<TextLink to="/books">Books</TextLink>}
+    >
       <BarList
         label="Owed to us by age"
         bars={owed.map(({ age, amount }) => ({

@@ -5,7 +5,11 @@ import { TextLink } from '../../../components/text-link.tsx';
 /** Hardware and supplies of which little is free. */
 export function RunsShort({ short }: { short: NonNullable<Today['short']> }) {
   return (
-    <Card title="Runs short" subtitle="less free than the shop wants to keep" aside={<TextLink to="/stockroom">Stockroom</TextLink>}>
+    <Card
+      title="Runs short"
+      subtitle="less free than the shop wants to keep"
+      aside={<TextLink to="/stockroom">Stockroom</TextLink>}
+    >
       {short.length === 0 ? (
         <p className="text-ink-soft">Everything that is counted is above its mark.</p>
       ) : (

@@ -19,7 +19,11 @@ export function ToDoList({ toDos, today }: { toDos: readonly ToDo[]; today: stri
             title={toDo.title}
             detail={<Detail toDo={toDo} today={today} />}
             actions={
-              <LinkButton to={toDo.to} tone={index === 0 ? 'primary' : 'secondary'} aria-label={`${toDo.action}: ${toDo.detail}`}>
+              <LinkButton
+                to={toDo.to}
+                tone={index === 0 ? 'primary' : 'secondary'}
+                aria-label={`${toDo.action}: ${toDo.detail}`}
+              >
                 {toDo.action}
               </LinkButton>
             }

@@ -13,10 +13,10 @@ const columns: Column<ToolReply>[] = [
     header: 'Tool',
     value: (row) => `${toolTitle(row)} ${row.name}`,
     cell: (row) => (
-      <>
+      <span className="block text-left">
         <TextLink to={`/pattern-room/tooling/${row.id}`}>{toolTitle(row)}</TextLink>
         <span className="block text-sm font-normal text-ink-soft">{row.name}</span>
-      </>
+      </span>
     ),
     onPhone: 'title',
   },

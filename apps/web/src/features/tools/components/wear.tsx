@@ -5,7 +5,7 @@ import { usesWord, wearText } from '../tool-words.ts';
 /** How much of its life a tool has given; said in words once it has given all. */
 export function Wear({ tool }: { tool: ToolReply }) {
   return (
-    <span className="inline-block w-40 text-left">
+    <span className="inline-block w-48 max-w-full text-left">
       <StitchProgress
         label={`${usesWord(tool.kind)} used`}
         done={tool.used}
