@@ -55,10 +55,7 @@ walk('from an empty shop to a sent quote of an own piece', async ({ page }) => {
     .not.toBe('');
   await page.getByLabel('Pattern', { exact: true }).selectOption({ label: 'Key fob' });
   await page.getByLabel('Pieces').first().fill('20');
-  await page
-    .getByLabel(/Your price each/)
-    .first()
-    .fill('4');
+  await page.getByLabel('Your price').first().fill('4');
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Save the draft' }).click();
   await page.waitForURL(/\/counter\/quotes\/\d+$/);

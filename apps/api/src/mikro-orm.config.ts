@@ -1,13 +1,10 @@
-import { fileURLToPath } from 'node:url';
-import { FileCacheAdapter } from '@mikro-orm/core';
 import { Migrator } from '@mikro-orm/migrations';
 import { TsMorphMetadataProvider } from '@mikro-orm/reflection';
 import { defineConfig, type Options } from '@mikro-orm/sqlite';
 import { writePool } from './db/connection.ts';
 import { entities } from './db/entities.ts';
+import { cacheDir, WholeFileCache } from './db/whole-file-cache.ts';
 import { migrations } from './migrations/migrations.ts';
-
-const cacheDir = fileURLToPath(new URL('../node_modules/.cache/mikro-orm', import.meta.url));
 
 /** `synchronous: 'OFF'` is for a file that is thrown away unless it is completed, such as a demo being made. */
 export function ormConfig(file: string, synchronous: 'FULL' | 'OFF' = 'FULL'): Options {
@@ -15,7 +12,7 @@ export function ormConfig(file: string, synchronous: 'FULL' | 'OFF' = 'FULL'): O
     dbName: file,
     entities,
     metadataProvider: TsMorphMetadataProvider,
-    metadataCache: { adapter: FileCacheAdapter, options: { cacheDir } },
+    metadataCache: { adapter: WholeFileCache, options: { cacheDir } },
     pool: writePool(synchronous),
     extensions: [Migrator],
     migrations: {
