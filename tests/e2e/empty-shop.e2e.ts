@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, expect } from 'vitest';
-import { closeBrowser, expectAccessible, walk } from '../support/browser.ts';
+import { closeBrowser } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
-import { settled, visit } from '../support/steps.ts';
+import { settled } from '../support/steps.ts';
+import { expectAccessible, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {

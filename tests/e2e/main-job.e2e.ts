@@ -1,17 +1,10 @@
 import { afterAll, beforeAll, expect } from 'vitest';
 import type { Page } from 'playwright-core';
-import {
-  browser,
-  closeBrowser,
-  expectAccessible,
-  phone,
-  walk,
-  watch,
-  wide,
-} from '../support/browser.ts';
+import { browser, closeBrowser, phone, watch, wide } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
 import { mailThat } from '../support/mailbox.ts';
-import { idIn, settled, signInAs, visit, type Role } from '../support/steps.ts';
+import { settled, signInAs, type Role } from '../support/steps.ts';
+import { expectAccessible, idIn, visit, walk } from '../support/walk.ts';
 
 const quantity = 60;
 

@@ -1,6 +1,7 @@
 import { afterAll, beforeAll } from 'vitest';
-import { closeBrowser, expectAccessible, walk } from '../support/browser.ts';
+import { closeBrowser } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import { expectAccessible, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {

@@ -1,7 +1,5 @@
 import { existsSync } from 'node:fs';
-import { AxeBuilder } from '@axe-core/playwright';
 import { chromium, type Browser, type Page } from 'playwright-core';
-import { expect, test } from 'vitest';
 
 const usual = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome'];
 
@@ -52,34 +50,3 @@ export function watch(page: Page): string[] {
 
 export const wide = { width: 1440, height: 900 };
 export const phone = { width: 390, height: 844 };
-
-interface Walk {
-  /** What the page has complained of; a test that provokes a complaint takes it out. */
-  complaints: string[];
-  page: Page;
-}
-
-/** A test with a page of its own, which fails when the page complained of anything. */
-export const walk = test.extend<Walk>({
-  complaints: async ({}, use) => use([]),
-  page: async ({ complaints }, use) => {
-    const context = await (await browser()).newContext({ viewport: wide });
-    const page = await context.newPage();
-    const heard = watch(page);
-    await use(page);
-    complaints.push(...heard);
-    await context.close();
-    expect(complaints, 'the page complained').toEqual([]);
-  },
-});
-
-/** Fails with what axe finds against WCAG 2.2 AA on the page as it stands. */
-export async function expectAccessible(page: Page): Promise<void> {
-  const { violations } = await new AxeBuilder({ page }).analyze();
-  const findings = violations.map(({ id, help, nodes }) => ({
-    id,
-    help,
-    where: nodes.slice(0, 3).map((node) => node.target.join(' ')),
-  }));
-  expect(findings, page.url()).toEqual([]);
-}
