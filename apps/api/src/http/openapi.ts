@@ -16,9 +16,9 @@ const problemReply = {
 
 /** The interface, generated from the contract; `x-access` says who may call. */
 export function openApiDocument() {
-  const registry = new OpenAPIRegistry();
-  for (const endpoint of endpoints) registry.registerPath(describe(endpoint));
-  return new OpenApiGeneratorV31(registry.definitions).generateDocument({
+  const documents = new OpenAPIRegistry();
+  for (const endpoint of endpoints) documents.registerPath(describe(endpoint));
+  return new OpenApiGeneratorV31(documents.definitions).generateDocument({
     openapi: '3.1.0',
     info: { title: 'Hidewright', version: '0.1.0' },
     servers: [{ url: '/api' }],

@@ -11,8 +11,8 @@ describe('compute', () => {
     ['allocate', { amount: '0.100', weights: [1, 2] }, { parts: ['0.033', '0.067'] }],
     ['allocate', { amount: 10, weights: [1, 1, 1] }, { parts: [4, 3, 3] }],
     ['round', { value: '1.005', places: 2, mode: 'halfUp' }, { value: '1.01' }],
-    ['round', { value: 1.005, places: 2, mode: 'halfEven' }, { value: '1.00' }],
-    ['round', { value: 2.5, places: 0, mode: 'halfEven' }, { value: '2' }],
+    ['round', { value: 1.005, places: 2, mode: 'halfEven' }, { value: 1 }],
+    ['round', { value: 2.5, places: 0, mode: 'halfEven' }, { value: 2 }],
     ['convert', { value: 8, from: 'oz', to: 'mm' }, { value: 3.175 }],
     ['convert', { value: '1', from: 'ft2', to: 'dm2' }, { value: 9.290304 }],
   ])('%s answers %j', (name, input, answer) => {

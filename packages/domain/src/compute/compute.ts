@@ -75,7 +75,9 @@ function answerRound(input: unknown): Answer {
     throw new InvalidInput('mode', 'Give mode as halfUp or halfEven.');
   }
   const places = read.number('places');
-  return { value: toPlaces(round(new Exact(read.decimal('value')), places, mode), places) };
+  const rounded = toPlaces(round(new Exact(read.decimal('value')), places, mode), places);
+  // An amount of money comes and goes as text; a number is answered by a number.
+  return { value: typeof read.any('value') === 'number' ? Number(rounded) : rounded };
 }
 
 function answerConvert(input: unknown): Answer {
