@@ -6,7 +6,7 @@ import { EmptyState } from '../../../components/empty-state.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
-import { InvoiceStateFilter } from '../../../features/invoices/components/invoice-state-filter.tsx';
+import { StateFilter } from '../../../components/state-filter.tsx';
 import { InvoicesTable } from '../../../features/invoices/components/invoices-table.tsx';
 import { WaitingOrders } from '../../../features/invoices/components/waiting-orders.tsx';
 import {
@@ -15,6 +15,9 @@ import {
 } from '../../../features/invoices/invoices.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { BooksNav } from './books-nav.tsx';
+
+/** Nothing is credited yet by this program. */
+const states = invoiceState.options.filter((state) => state !== 'credited');
 
 const readState = (search: URLSearchParams) => invoiceState.safeParse(search.get('state')).data;
 
@@ -40,7 +43,7 @@ export function Component() {
       <PageHeader title="Invoices" />
       <BooksNav />
       {state === undefined && <WaitingOrders orders={waiting.items} />}
-      <InvoiceStateFilter chosen={state} />
+      <StateFilter place="/books/invoices" states={states} chosen={state} />
       <InvoicesTable
         key={state}
         rows={data.pages.flatMap((page) => page.items)}

@@ -7,7 +7,7 @@ import { LinkButton } from '../../../components/link-button.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
-import { StateFilter } from '../../../features/quotes/components/state-filter.tsx';
+import { StateFilter } from '../../../components/state-filter.tsx';
 import { QuotesTable } from '../../../features/quotes/components/quotes-table.tsx';
 import { quotesQuery } from '../../../features/quotes/quotes.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
@@ -42,7 +42,7 @@ export function Component() {
     <>
       <PageHeader title="Quotes" action={start} />
       <CounterNav />
-      <StateFilter chosen={state} />
+      <StateFilter place="/counter/quotes" states={quoteStates} chosen={state} />
       <QuotesTable
         rows={data.pages.flatMap((page) => page.items)}
         empty={<NoQuotes state={state} isOwner={isOwner} />}

@@ -7,7 +7,7 @@ import { LinkButton } from '../../../components/link-button.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
-import { OrderStateFilter } from '../../../features/purchase-orders/components/order-state-filter.tsx';
+import { StateFilter } from '../../../components/state-filter.tsx';
 import { PurchaseOrdersTable } from '../../../features/purchase-orders/components/purchase-orders-table.tsx';
 import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
@@ -49,7 +49,7 @@ export function Component() {
     <>
       <PageHeader title="Purchase orders" action={add} />
       <StockroomNav />
-      <OrderStateFilter chosen={state} />
+      <StateFilter place="/stockroom/purchase-orders" states={purchaseOrderStates} chosen={state} />
       <PurchaseOrdersTable
         rows={data.pages.flatMap((page) => page.items)}
         empty={none}

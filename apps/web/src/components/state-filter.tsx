@@ -1,15 +1,19 @@
-import { purchaseOrderStates, type PurchaseOrderState } from '@hidewright/contract';
 import { Link } from 'react-router-dom';
-import { classNames } from '../../../lib/class-names.ts';
+import { classNames } from '../lib/class-names.ts';
 
-const place = '/stockroom/purchase-orders';
+interface StateFilterProps {
+  /** The list's own address. */
+  place: string;
+  states: readonly string[];
+  chosen: string | undefined;
+}
 
-/** The orders of one state, or all of them; the address tells which. */
-export function OrderStateFilter({ chosen }: { chosen: PurchaseOrderState | undefined }) {
+/** A list's rows of one state, or all of them; the address tells which. */
+export function StateFilter({ place, states, chosen }: StateFilterProps) {
   return (
     <nav aria-label="By state" className="no-print mb-4">
       <ul className="flex flex-wrap gap-1.5">
-        {[undefined, ...purchaseOrderStates].map((state) => (
+        {[undefined, ...states].map((state) => (
           <li key={state ?? 'all'}>
             <Link
               to={state === undefined ? place : `${place}?state=${encodeURIComponent(state)}`}
