@@ -49,7 +49,7 @@ export type { FreeLot, LotTake } from './stock/choose-lots.ts';
 
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';
-export * from './promise/book-hours.ts';
+export * from './promise/bench-plan.ts';
 
 export * from './compare/compare-run.ts';
 export { compute, computeNames } from './compute/compute.ts';

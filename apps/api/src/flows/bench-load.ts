@@ -1,6 +1,6 @@
+import type { Bench, HeldWork } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { scaled } from '../db/columns/scaled-decimal.ts';
-import type { Bench, HeldWork } from '../modules/jobs/bench-plan.ts';
 import { JobStep } from '../modules/jobs/job-step.entity.ts';
 import { shareDone, stepLimits } from '../modules/jobs/step-limits.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';

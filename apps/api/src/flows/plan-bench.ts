@@ -1,12 +1,6 @@
 import type { BenchDay, BenchHours } from '@hidewright/contract';
-import { addDays } from '@hidewright/domain';
+import { addDays, planDays, shortByPromise, type Bench, type PlannedDay } from '@hidewright/domain';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
-import {
-  planDays,
-  shortByPromise,
-  type Bench,
-  type PlannedDay,
-} from '../modules/jobs/bench-plan.ts';
 import type { Work } from '../work.ts';
 import { benchToday, openJobs, type OpenJob } from './bench-load.ts';
 

@@ -11,7 +11,7 @@ interface PriceLadderBarProps {
 export function PriceLadderBar({ loses, misses, bench, allIn, target }: PriceLadderBarProps) {
   const standing = loses ? 'loses money' : misses ? 'misses the target' : 'reaches the target';
   return (
-    <div className="relative h-10">
+    <div className="relative h-12">
       <span className="sr-only">{standing}</span>
       <span
         className={`absolute top-1/2 left-0 h-3.5 -translate-y-1/2 ${barLook(loses, misses)}`}

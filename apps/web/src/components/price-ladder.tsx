@@ -1,6 +1,6 @@
 import { Decimal } from 'decimal.js';
 import { classNames } from '../lib/class-names.ts';
-import { countText, numberText, unitPriceText } from '../lib/formatting.ts';
+import { countText, numberText, percentText, unitPriceText } from '../lib/formatting.ts';
 import { PriceLadderBar } from './price-ladder-bar.tsx';
 
 interface Rung {
@@ -10,6 +10,8 @@ interface Rung {
   perBenchHour: string;
   /** Left after wages too, by all hours, desk time included. */
   perHourAllIn: string;
+  /** Of the total, after all costs, in per cent. */
+  marginPercent: string;
   /** It loses money: nothing is left. */
   loses: boolean;
 }
@@ -31,7 +33,7 @@ export function PriceLadder({ rungs, target, currency, chosen, onChoose }: Price
   return (
     <table className="w-full border-separate border-spacing-0">
       <caption className="sr-only">
-        {`Price breaks in ${currency}. What is left per bench hour and per hour all in, against a target of ${numberText(target, 2)} per bench hour.`}
+        {`Price breaks in ${currency}, each with its margin. What is left per bench hour and per hour all in, against a target of ${numberText(target, 2)} per bench hour.`}
       </caption>
       <thead className="text-ink-soft">
         <tr>
@@ -39,7 +41,7 @@ export function PriceLadder({ rungs, target, currency, chosen, onChoose }: Price
             pieces
           </th>
           <th scope="col" className="py-1 pr-2 text-right font-normal">
-            each
+            each<span className="block text-sm">margin</span>
           </th>
           <th scope="col" className="relative h-8 w-[45%] p-0 font-normal">
             <span className="sr-only">left per hour against the target</span>
@@ -65,7 +67,7 @@ export function PriceLadder({ rungs, target, currency, chosen, onChoose }: Price
           <tr
             key={rung.quantity}
             aria-current={rung.quantity === chosen ? 'true' : undefined}
-            className={classNames('h-10', rung.quantity === chosen && 'bg-verdigris-pale')}
+            className={classNames('h-12', rung.quantity === chosen && 'bg-verdigris-pale')}
           >
             <th
               scope="row"
@@ -76,8 +78,14 @@ export function PriceLadder({ rungs, target, currency, chosen, onChoose }: Price
             >
               <RungChoice rung={rung} chosen={rung.quantity === chosen} onChoose={onChoose} />
             </th>
-            <td className="pr-2 text-right font-semibold">{unitPriceText(rung.unitPrice)}</td>
-            <td className="h-10 border-x-4 border-edge p-0">
+            <td className="pr-2 text-right leading-tight">
+              <span className="font-semibold">{unitPriceText(rung.unitPrice)}</span>
+              <span className="block text-sm whitespace-nowrap text-ink-soft">
+                <span className="sr-only">, margin </span>
+                {percentText(rung.marginPercent)}
+              </span>
+            </td>
+            <td className="h-12 border-x-4 border-edge p-0">
               <PriceLadderBar
                 loses={rung.loses}
                 misses={new Decimal(rung.perBenchHour).lt(target)}

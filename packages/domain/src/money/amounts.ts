@@ -32,6 +32,12 @@ export function lineAmount(
   return toPlaces(checkSize(amount, digits, 'amount'), digits);
 }
 
+/** A unit price as a person writes it: with the currency's decimals, or more where it has them (4.2 → 4.20). */
+export function unitPriceInFull(price: DecimalText, digits: number): DecimalText {
+  const exact = new Exact(price);
+  return exact.toFixed(Math.max(digits, exact.decimalPlaces()));
+}
+
 /** The sum of amounts with the currency's decimals; '0.00' for none. @throws InvalidInput */
 export function sumMoney(amounts: readonly DecimalText[], digits: number): DecimalText {
   const sum = amounts.reduce(

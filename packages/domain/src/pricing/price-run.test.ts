@@ -199,7 +199,7 @@ describe('warnings', () => {
     });
     expect(numbers.warnings).toEqual([
       'At 20 this run loses 11.40: it costs more than it brings, wages included.',
-      'At 20 it leaves 13.20 per bench hour, below your 60.00: 3.2 each would reach it.',
+      'At 20 it leaves 13.20 per bench hour, below your 60.00: 3.20 each would reach it.',
     ]);
   });
 
@@ -225,7 +225,7 @@ describe('warnings', () => {
     const breaks = [typed(100, '4.00'), typed(200, '5.00')];
     const tooling = [{ name: 'Plate', cost: '85.00', charge: '40.00' }];
     expect(priceRun({ ...run, breaks, tooling }).warnings).toEqual([
-      'The price rises from 4 at 100 to 5 at 200: a larger order should not cost more each.',
+      'The price rises from 4.00 at 100 to 5.00 at 200: a larger order should not cost more each.',
       'The tooling costs 45.00 more than is charged for it: charge it, or the run pays for it.',
     ]);
   });

@@ -1,5 +1,6 @@
 import { sumOf } from '../costing/cost-run.ts';
 import type { RunInput } from '../costing/run-input.ts';
+import { unitPriceInFull } from '../money/amounts.ts';
 import { Exact } from '../numbers/decimal-text.ts';
 import type { BreakNumbers } from './run-numbers.ts';
 
@@ -29,7 +30,7 @@ export function breakWarnings(
   }
   if (!here.reachesTarget) {
     warnings.push(
-      `At ${here.quantity} it leaves ${here.perBenchHour} per bench hour, below your ${input.targetPerHour}: ${here.priceThatReachesTarget} each would reach it.`,
+      `At ${here.quantity} it leaves ${here.perBenchHour} per bench hour, below your ${input.targetPerHour}: ${unitPriceInFull(here.priceThatReachesTarget, input.minorDigits)} each would reach it.`,
     );
   }
   if (next && here.cheaperFrom === here.quantity) {
@@ -42,15 +43,16 @@ export function breakWarnings(
 
 /** What to say about the ladder and the order as a whole. */
 export function ladderWarnings(input: RunInput, breaks: readonly BreakNumbers[]): string[] {
-  return [...risingPrices(breaks), ...unpaidTooling(input)];
+  return [...risingPrices(breaks, input.minorDigits), ...unpaidTooling(input)];
 }
 
-function risingPrices(breaks: readonly BreakNumbers[]): string[] {
+function risingPrices(breaks: readonly BreakNumbers[], digits: number): string[] {
   return breaks.flatMap((here, at) => {
     const next = breaks[at + 1];
     if (!next || new Exact(next.priceEach).lte(here.priceEach)) return [];
+    const [lower, higher] = [here, next].map((rung) => unitPriceInFull(rung.priceEach, digits));
     return [
-      `The price rises from ${here.priceEach} at ${here.quantity} to ${next.priceEach} at ${next.quantity}: a larger order should not cost more each.`,
+      `The price rises from ${lower} at ${here.quantity} to ${higher} at ${next.quantity}: a larger order should not cost more each.`,
     ];
   });
 }

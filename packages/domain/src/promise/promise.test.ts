@@ -1,6 +1,5 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bookHours, freeMinutesUntil } from './book-hours.ts';
 import { addDays, dayFromNumber, dayNumber, daysBetween, weekday } from './day.ts';
 import { addWorkdays, isWorkday, workdaysBetween } from './workdays.ts';
 
@@ -55,38 +54,6 @@ describe('workdays', { timeout: 60_000 }, () => {
         expect(workdaysBetween(day, later)).toBe(count);
         expect(workdaysBetween(later, day)).toBe(-count);
       }),
-    );
-  });
-});
-
-describe('bookHours', { timeout: 60_000 }, () => {
-  const time = { from: '2027-03-04', minutesPerDay: '480', booked: { '2027-03-05': '400' } };
-
-  it('fills the first free minutes and says when it is done', () => {
-    expect(bookHours(time, '600')).toEqual({
-      day: '2027-03-08',
-      bookings: [
-        { day: '2027-03-04', minutes: '480' },
-        { day: '2027-03-05', minutes: '80' },
-        { day: '2027-03-08', minutes: '40' },
-      ],
-    });
-  });
-
-  it('books no more than is free until that day, and that day is the first that works', () => {
-    fc.assert(
-      fc.property(aDay, fc.integer({ min: 1, max: 20_000 }), (from, minutes) => {
-        const { day, bookings } = bookHours({ ...time, from }, String(minutes));
-        expect(bookings.reduce((sum, each) => sum + Number(each.minutes), 0)).toBe(minutes);
-        expect(Number(freeMinutesUntil({ ...time, from }, day))).toBeGreaterThanOrEqual(minutes);
-        expect(Number(freeMinutesUntil({ ...time, from }, addDays(day, -1)))).toBeLessThan(minutes);
-      }),
-    );
-  });
-
-  it('says so where nobody ever works', () => {
-    expect(() => bookHours({ ...time, minutesPerDay: '0' }, '10')).toThrow(
-      'check the bench minutes',
     );
   });
 });

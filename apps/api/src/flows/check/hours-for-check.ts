@@ -1,6 +1,6 @@
+import { earliestDay, freeUntil } from '@hidewright/domain';
 import type { Decimal } from 'decimal.js';
 import { scaled, unscaled } from '../../db/columns/scaled-decimal.ts';
-import { earliestDay, freeUntil } from '../../modules/jobs/bench-plan.ts';
 import { sayDay } from '../../modules/quotes/say-day.ts';
 import type { Work } from '../../work.ts';
 import { benchToday, openJobs } from '../bench-load.ts';

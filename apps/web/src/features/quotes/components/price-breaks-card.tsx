@@ -34,7 +34,8 @@ export function PriceBreaksCard({ numbers, target, chosen, onChoose }: PriceBrea
       />
       <p className="mt-2 text-sm text-ink-soft">
         Bench: left after everything bought, by bench hours. All in, the mark on the rung: after
-        wages too, by all hours, desk time included.
+        wages too, by all hours, desk time included. Margin: what remains of the total after all
+        costs.
       </p>
       <TypedPrices numbers={numbers} />
       <Warnings numbers={numbers} chosen={chosen} />

@@ -1,4 +1,5 @@
-import { addDays, daysBetween, isWorkday, type Day } from '@hidewright/domain';
+import { addDays, type Day, daysBetween } from './day.ts';
+import { isWorkday } from './workdays.ts';
 
 /** Work that the shop has taken on; minutes are whole hundredths, so that sums are exact. */
 export interface HeldWork {

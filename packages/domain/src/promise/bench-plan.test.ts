@@ -1,4 +1,3 @@
-import { addDays } from '@hidewright/domain';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import {
@@ -9,6 +8,7 @@ import {
   type Bench,
   type HeldWork,
 } from './bench-plan.ts';
+import { addDays } from './day.ts';
 
 /** Tuesday; 6 hours a day. */
 const bench: Bench = { today: '2026-12-01', perDay: 36_000, loggedToday: 0 };
