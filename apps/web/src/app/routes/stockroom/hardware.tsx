@@ -9,13 +9,12 @@ import { StateMark } from '../../../components/state-mark.tsx';
 import { ChangeHardwareForm } from '../../../features/hardware/components/change-hardware-form.tsx';
 import { HardwareFacts } from '../../../features/hardware/components/hardware-facts.tsx';
 import { hardwareQuery } from '../../../features/hardware/hardware.queries.ts';
-import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
-import { HeldList } from '../../../features/stock/components/held-list.tsx';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
 import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { choicesOf } from './choices.ts';
+import { HeldAndAdjust } from './held-and-adjust.tsx';
 import { ItemLayout } from './item-layout.tsx';
 import { useRole } from './use-role.ts';
 
@@ -49,18 +48,7 @@ export function Component() {
             <HardwareFacts hardware={hardware} />
           </Card>
         }
-        aside={
-          <>
-            <Card title="Held for jobs">
-              <HeldList item={item} mayOpenJobs={handlesStock} />
-            </Card>
-            {handlesStock && (
-              <Card title="Adjust" subtitle="to what is really there">
-                <AdjustForm key={id} item={{ of: 'hardware', hardwareId: id }} />
-              </Card>
-            )}
-          </>
-        }
+        aside={<HeldAndAdjust item={item} handlesStock={handlesStock} />}
       >
         <Card title="Movements">
           <MovementsTable item={item} />

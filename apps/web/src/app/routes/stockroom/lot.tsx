@@ -9,12 +9,11 @@ import { ChangeLotForm } from '../../../features/lots/components/change-lot-form
 import { LotFacts } from '../../../features/lots/components/lot-facts.tsx';
 import { formText } from '../../../features/lots/lot-words.ts';
 import { lotQuery } from '../../../features/lots/lots.queries.ts';
-import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
-import { HeldList } from '../../../features/stock/components/held-list.tsx';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
 import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
+import { HeldAndAdjust } from './held-and-adjust.tsx';
 import { ItemLayout } from './item-layout.tsx';
 import { useRole } from './use-role.ts';
 
@@ -49,18 +48,7 @@ export function Component() {
             <LotFacts lot={lot} />
           </Card>
         }
-        aside={
-          <>
-            <Card title="Held for jobs">
-              <HeldList item={item} mayOpenJobs={handlesStock} />
-            </Card>
-            {handlesStock && (
-              <Card title="Adjust" subtitle="to what is really there">
-                <AdjustForm key={id} item={{ of: 'lot', lotId: id }} />
-              </Card>
-            )}
-          </>
-        }
+        aside={<HeldAndAdjust item={item} handlesStock={handlesStock} />}
       >
         <Card title="Movements">
           <MovementsTable item={item} />

@@ -1,35 +1,14 @@
-import { useSuspenseQuery } from '@tanstack/react-query';
-import { useNavigate } from 'react-router-dom';
-import { Card } from '../../../components/card.tsx';
-import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
-import { say } from '../../../components/toast.ts';
 import { AddHardwareForm } from '../../../features/hardware/components/add-hardware-form.tsx';
-import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
-import { queryClient } from '../../../lib/query-client.ts';
-import { choicesOf } from './choices.ts';
+import { loadSuppliers, NewStockItem } from './new-stock-item.tsx';
 
-export async function loader() {
-  await queryClient.ensureQueryData(suppliersQuery());
-  return null;
-}
+export const loader = loadSuppliers;
 
 export function Component() {
-  const navigate = useNavigate();
-  const { data: suppliers } = useSuspenseQuery(suppliersQuery());
   return (
-    <>
-      <PageHeader title="New hardware or supplies" />
-      <Card>
-        <AddHardwareForm
-          suppliers={choicesOf(suppliers.items)}
-          onAdded={(hardware) => {
-            say(`${hardware.name} is added.`);
-            void navigate(`/stockroom/hardware/${hardware.id}`);
-          }}
-        />
-      </Card>
-    </>
+    <NewStockItem title="New hardware or supplies" room="/stockroom/hardware">
+      {(suppliers, onAdded) => <AddHardwareForm suppliers={suppliers} onAdded={onAdded} />}
+    </NewStockItem>
   );
 }
 

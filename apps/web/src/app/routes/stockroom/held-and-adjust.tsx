@@ -1,0 +1,28 @@
+import { Card } from '../../../components/card.tsx';
+import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
+import { HeldList } from '../../../features/stock/components/held-list.tsx';
+
+interface HeldAndAdjustProps {
+  item: { lotId: number } | { hardwareId: number };
+  /** Whether the person works with the stock, and may enter the bench. */
+  handlesStock: boolean;
+}
+
+/** Beside a lot or a hardware: which jobs it is held for, and setting it to what is really there. */
+export function HeldAndAdjust({ item, handlesStock }: HeldAndAdjustProps) {
+  return (
+    <>
+      <Card title="Held for jobs">
+        <HeldList item={item} mayOpenJobs={handlesStock} />
+      </Card>
+      {handlesStock && (
+        <Card title="Adjust" subtitle="to what is really there">
+          <AdjustForm
+            key={JSON.stringify(item)}
+            item={'lotId' in item ? { of: 'lot', ...item } : { of: 'hardware', ...item }}
+          />
+        </Card>
+      )}
+    </>
+  );
+}
