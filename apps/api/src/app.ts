@@ -24,6 +24,7 @@ import { orderRoutes } from './modules/orders/orders.routes.ts';
 import { patternRoutes } from './modules/patterns/patterns.routes.ts';
 import { peopleRoutes } from './modules/people/people.routes.ts';
 import { periodRoutes } from './modules/periods/periods.routes.ts';
+import { pressRoutes } from './modules/presses/presses.routes.ts';
 import { purchaseOrderRoutes } from './modules/purchase-orders/purchase-orders.routes.ts';
 import { quoteRoutes } from './modules/quotes/quotes.routes.ts';
 import { searchRoutes } from './modules/search/search.routes.ts';
@@ -52,6 +53,7 @@ const rooms: ((context: Context) => Router)[] = [
   patternRoutes,
   layoutRoutes,
   toolRoutes,
+  pressRoutes,
   jobRoutes,
   lotRoutes,
   hardwareRoutes,

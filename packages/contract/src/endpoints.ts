@@ -13,6 +13,7 @@ import * as orders from './orders.ts';
 import * as patterns from './patterns.ts';
 import * as people from './people.ts';
 import * as periods from './periods.ts';
+import * as presses from './presses.ts';
 import * as purchaseOrders from './purchase-orders.ts';
 import * as quotes from './quotes.ts';
 import * as search from './search.ts';
@@ -40,6 +41,7 @@ const rooms: Record<string, unknown>[] = [
   patterns,
   layouts,
   tools,
+  presses,
   jobs,
   benchHours,
   leathers,

@@ -48,6 +48,14 @@ export const signedAreaMm2 = decimalText(
 );
 /** A length in mm, to a millionth, so that a 64th of an inch is exact. */
 export const lengthMm = decimalText(6, 6, '279.4', 'Enter a length such as 95 or 4 3/8.');
+/** A length within limits; whatever is wrong with it, the sentence names it. */
+export function lengthBetween(word: string, min: number, max: number) {
+  const sentence = `Enter the ${word}, from ${min} to ${max} mm.`;
+  const fits = (text: string) =>
+    lengthMm.safeParse(text).success && Number(text) >= min && Number(text) <= max;
+  return z.string(sentence).trim().refine(fits, sentence).meta({ example: '95' });
+}
+
 /** A share in per cent, 0 to 100. */
 export const percent = decimalText(3, 4, '10', 'Enter a percentage from 0 to 100.').refine(
   (text) => Number(text) <= 100,

@@ -18,6 +18,7 @@ export * from './orders.ts';
 export * from './patterns.ts';
 export * from './people.ts';
 export * from './periods.ts';
+export * from './presses.ts';
 export * from './problem.ts';
 export * from './purchase-orders.ts';
 export * from './quote-body.ts';

@@ -1,19 +1,11 @@
 import { z } from 'zod';
 import { DomainError, InvalidInput, checkOutline } from '@hidewright/domain';
 import { endpoint } from './endpoint.ts';
-import { id, idParams, lengthMm, positiveCount } from './fields.ts';
+import { id, idParams, lengthBetween, positiveCount } from './fields.ts';
 import { outlineOf } from './layout-asked.ts';
 
-/** A length within limits; whatever is wrong with it, the sentence names it. */
-function length(word: string, min: number, max: number) {
-  const sentence = `Enter the ${word}, from ${min} to ${max} mm.`;
-  const fits = (text: string) =>
-    lengthMm.safeParse(text).success && Number(text) >= min && Number(text) <= max;
-  return z.string(sentence).trim().refine(fits, sentence).meta({ example: '95' });
-}
-
-const side = (word: string) => length(word, 1, 5000);
-const cornerRadiusMm = length('corner radius', 0, 2500);
+const side = (word: string) => lengthBetween(word, 1, 5000);
+const cornerRadiusMm = lengthBetween('corner radius', 0, 2500);
 
 /** The closed curve that the cutting die cuts, as its measures were typed. */
 export const outline = z
@@ -55,7 +47,7 @@ export const outline = z
   });
 export type TypedOutline = z.infer<typeof outline>;
 
-const containerSide = (word: string) => length(word, 1, 20_000);
+const containerSide = (word: string) => lengthBetween(word, 1, 20_000);
 
 /** What is cut from. */
 export const container = z.discriminatedUnion(
@@ -93,9 +85,9 @@ export const layoutFields = {
   /** The panel or strip that the outline is laid on; a hand count brings its own panel. */
   container: container.nullable(),
   /** The least distance between two cuts. */
-  spacingMm: length('spacing', 0, 100),
+  spacingMm: lengthBetween('spacing', 0, 100),
   /** The border of a panel or strip that stays unused. */
-  trimMm: length('trim', 0, 100),
+  trimMm: lengthBetween('trim', 0, 100),
 };
 
 type LayoutFields = z.infer<z.ZodObject<typeof layoutFields>>;

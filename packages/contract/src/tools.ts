@@ -2,9 +2,11 @@ import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import {
+  areaMm2,
   id,
   idParams,
   instant,
+  lengthBetween,
   line,
   money,
   optionalLine,
@@ -22,6 +24,16 @@ const kind = z.enum(toolKinds, 'Choose cutting die or stamp plate.');
 const state = z.enum(toolStates, 'Choose on the rack, on order or scrapped.');
 const metal = z.enum(['', ...plateMetals], 'Choose magnesium, copper, brass or steel.');
 
+const fewMm = (word: string) => lengthBetween(word, 0, 20).nullable();
+
+/** What meets the press: a die's rule and how many pieces it cuts at once, a plate's border and relief. */
+const atThePress = {
+  piecesPerStrike: positiveCount.max(100, 'Enter at most 100 pieces.'),
+  ruleThicknessMm: fewMm('thickness of the rule'),
+  borderMm: fewMm('border of the plate'),
+  reliefAreaMm2: areaMm2.nullable(),
+};
+
 const typed = {
   name: line(80, 'Enter a name, such as Coaster 95 mm.'),
   metal,
@@ -32,6 +44,7 @@ const typed = {
   patternId: id.nullable(),
   customerId: id.nullable(),
   state,
+  ...atThePress,
 };
 
 export const tool = z
@@ -54,6 +67,10 @@ export const tool = z
     customerId: id.nullable(),
     customerName: z.string().nullable(),
     state,
+    piecesPerStrike: z.int(),
+    ruleThicknessMm: z.string().nullable(),
+    borderMm: z.string().nullable(),
+    reliefAreaMm2: z.string().nullable(),
     version,
   })
   .meta({ id: 'Tool' });
@@ -109,6 +126,10 @@ export const addTool = endpoint({
     patternId: typed.patternId.default(null),
     customerId: typed.customerId.default(null),
     state: state.default('on the rack'),
+    piecesPerStrike: atThePress.piecesPerStrike.default(1),
+    ruleThicknessMm: atThePress.ruleThicknessMm.default(null),
+    borderMm: atThePress.borderMm.default(null),
+    reliefAreaMm2: atThePress.reliefAreaMm2.default(null),
   }),
   reply: tool,
 });

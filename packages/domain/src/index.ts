@@ -32,6 +32,8 @@ export { layOut } from './yield/lay-out.ts';
 export { handCount } from './yield/hand-count.ts';
 export { layoutInputKey } from './yield/layout-input-key.ts';
 
+export * from './press/press-load.ts';
+
 export * from './rejects/cut-count.ts';
 export * from './rejects/allowance.ts';
 

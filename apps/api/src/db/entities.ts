@@ -22,6 +22,7 @@ import { Person } from '../modules/people/person.entity.ts';
 import { WebSession } from '../modules/people/web-session.entity.ts';
 import { Period } from '../modules/periods/period.entity.ts';
 import { Posting } from '../modules/periods/posting.entity.ts';
+import { Press } from '../modules/presses/press.entity.ts';
 import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts';
 import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
 import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
@@ -61,6 +62,7 @@ export const entities = [
   Period,
   Person,
   Posting,
+  Press,
   PurchaseLine,
   PurchaseOrder,
   Quote,

@@ -1,10 +1,10 @@
-import { Decimal } from 'decimal.js';
 import type {
   addTool as addToolEndpoint,
   BodyOf,
   changeTool as changeToolEndpoint,
 } from '@hidewright/contract';
 import { assignDefined } from '../db/assign-defined.ts';
+import { decimals } from '../db/decimals.ts';
 import { requireVersion } from '../http/conditions.ts';
 import { invalid, type FieldFault } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
@@ -22,7 +22,9 @@ import type { Work } from '../work.ts';
 export async function addTool(work: Work, asked: BodyOf<typeof addToolEndpoint>): Promise<Tool> {
   const number = asked.number === '' ? await nextNumber(work, asked.kind) : asked.number;
   await requireSound(work, { ...asked, number });
-  const tool = work.em.create(Tool, { ...asked, number, cost: new Decimal(asked.cost) });
+  const { cost, ruleThicknessMm, borderMm, reliefAreaMm2, ...plain } = asked;
+  const measures = decimals({ cost, ruleThicknessMm, borderMm, reliefAreaMm2 });
+  const tool = work.em.create(Tool, { ...plain, number, ...measures });
   await work.em.flush();
   await logDeed(work, { action: `added ${nameOf(tool)}`, subjectKind: 'tool', subjectId: tool.id });
   return tool;
@@ -42,11 +44,11 @@ export async function changeTool(
     { kind: 'tool', id: tool.id, version: tool.version },
     asked.ifMatch,
   );
-  const { cost, ...plain } = asked.change;
+  const { cost, ruleThicknessMm, borderMm, reliefAreaMm2, ...plain } = asked.change;
   if (plain.state !== undefined) requireNextState(tool, plain.state);
   await requireSound(work, afterChange(tool, plain));
-  assignDefined(tool, plain);
-  if (cost !== undefined) tool.cost = new Decimal(cost);
+  const measures = decimals({ cost, ruleThicknessMm, borderMm, reliefAreaMm2 });
+  assignDefined(tool, { ...plain, ...measures });
   await work.em.flush();
   const detail = { changed: Object.keys(asked.change), state: tool.state };
   await logDeed(work, {

@@ -1,4 +1,8 @@
 import { TheHouse } from './migration-20261201-the-house.ts';
+import { ThePresses } from './migration-20261201-the-presses.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
-export const migrations = [{ name: 'migration-20261201-the-house', class: TheHouse }];
+export const migrations = [
+  { name: 'migration-20261201-the-house', class: TheHouse },
+  { name: 'migration-20261201-the-presses', class: ThePresses },
+];

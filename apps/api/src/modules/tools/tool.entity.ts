@@ -1,11 +1,11 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 import type { Decimal } from 'decimal.js';
-import { MoneyType } from '../../db/columns/columns.ts';
+import { AreaType, LengthType, MoneyType } from '../../db/columns/columns.ts';
 
 /** A cutting die or a stamp plate: what it cost, how much life it has, where it lives. */
 @Entity({ tableName: 'tool' })
 export class Tool {
-  [OptionalProps]?: 'metal' | 'used' | 'slot' | 'version';
+  [OptionalProps]?: 'metal' | 'used' | 'slot' | 'piecesPerStrike' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -44,6 +44,22 @@ export class Tool {
 
   @Property({ type: 'text', columnType: 'text' })
   state!: 'on the rack' | 'on order' | 'scrapped';
+
+  /** How many pieces a die cuts at once. */
+  @Property({ type: 'integer', columnType: 'integer' })
+  piecesPerStrike = 1;
+
+  /** Of a die: its rule stands outside the outline by so much. */
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  ruleThicknessMm: Decimal | null = null;
+
+  /** Of a plate: how far it stands out around the outline. */
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  borderMm: Decimal | null = null;
+
+  /** Of a plate: what one impression presses into the leather. */
+  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  reliefAreaMm2: Decimal | null = null;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;

@@ -57,6 +57,10 @@ export async function describeTools({ em }: Work, tools: Tool[]): Promise<ToolRe
     customerId: tool.customerId,
     customerName: customers.find(({ id }) => id === tool.customerId)?.name ?? null,
     state: tool.state,
+    piecesPerStrike: tool.piecesPerStrike,
+    ruleThicknessMm: tool.ruleThicknessMm?.toString() ?? null,
+    borderMm: tool.borderMm?.toString() ?? null,
+    reliefAreaMm2: tool.reliefAreaMm2?.toString() ?? null,
     version: tool.version,
   }));
 }

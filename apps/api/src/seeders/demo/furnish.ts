@@ -1,5 +1,6 @@
 import { Decimal } from 'decimal.js';
 import type { PatternDefinition } from '@hidewright/contract';
+import { decimals } from '../../db/decimals.ts';
 import { openNewShop } from '../../flows/open-new-shop.ts';
 import { addPattern } from '../../flows/save-pattern.ts';
 import { addTool } from '../../flows/save-tool.ts';
@@ -10,6 +11,7 @@ import { layoutFor } from '../../modules/layouts/stored-layouts.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
 import { Person } from '../../modules/people/person.entity.ts';
 import { hashPassword } from '../../modules/people/passwords.ts';
+import { Press } from '../../modules/presses/press.entity.ts';
 import { Supplier } from '../../modules/suppliers/supplier.entity.ts';
 import { TaxRate } from '../../modules/tax-rates/tax-rate.entity.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
@@ -18,7 +20,7 @@ import { Named, type DemoShop } from './demo-shop.ts';
 import { customers } from './scenario/customers.ts';
 import { patterns } from './scenario/patterns.ts';
 import { demoPassword, people, shop as shopOf } from './scenario/people.ts';
-import { hardware, leathers, suppliers } from './scenario/stockroom.ts';
+import { hardware, leathers, presses, suppliers } from './scenario/stockroom.ts';
 
 /** What the shop has before its year begins, by name. */
 export interface Furnished {
@@ -69,6 +71,12 @@ async function furnishRooms(work: Work): Promise<Furnished> {
   };
   for (const each of suppliers)
     await note(work, furnished.suppliers, 'supplier', work.em.create(Supplier, each));
+  for (const { name, ...measures } of presses) {
+    const press = work.em.create(Press, { name, ...decimals(measures) });
+    await work.em.flush();
+    const action = `added the press ${name}`;
+    await logDeed(work, { action, subjectKind: 'press', subjectId: press.id });
+  }
   for (const { supplier, ...each } of leathers) {
     const leather = work.em.create(Leather, {
       ...each,
@@ -155,6 +163,10 @@ async function furnishPattern(
       patternId: made.id,
       customerId: null,
       state: 'on the rack',
+      piecesPerStrike: 1,
+      ruleThicknessMm: '1.05',
+      borderMm: null,
+      reliefAreaMm2: null,
     });
   });
 }

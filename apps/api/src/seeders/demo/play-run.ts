@@ -142,6 +142,10 @@ async function orderPlate(
     patternId,
     customerId,
     state: 'on order',
+    piecesPerStrike: 1,
+    ruleThicknessMm: null,
+    borderMm: '1.5',
+    reliefAreaMm2: '640',
   });
 }
 

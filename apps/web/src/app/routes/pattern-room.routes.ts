@@ -31,6 +31,11 @@ export const patternRoomRoutes: RouteObject[] = [
         ],
       },
       {
+        path: 'presses',
+        handle: { crumb: 'Presses' },
+        lazy: () => import('./pattern-room/presses.tsx'),
+      },
+      {
         path: 'tooling',
         handle: { crumb: 'Tooling' },
         children: [

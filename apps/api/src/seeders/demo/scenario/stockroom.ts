@@ -32,6 +32,18 @@ export const suppliers = [
 ] as const;
 type SupplierName = (typeof suppliers)[number]['name'];
 
+export const presses = [
+  {
+    name: 'Clicker by the window',
+    bedWidthMm: '610',
+    bedDepthMm: '330',
+    throatMm: '300',
+    shutHeightMm: '95',
+    ruleMm: '900',
+    reliefAreaMm2: '1600',
+  },
+] as const;
+
 export const leathers = [
   {
     name: 'Oak tan russet 5–6 oz',

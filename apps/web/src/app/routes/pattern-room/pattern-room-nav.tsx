@@ -3,6 +3,7 @@ import { SectionNav, type SectionLink } from '../../../components/section-nav.ts
 const items: readonly SectionLink[] = [
   { to: '/pattern-room/patterns', word: 'Patterns' },
   { to: '/pattern-room/tooling', word: 'Tooling' },
+  { to: '/pattern-room/presses', word: 'Presses' },
 ];
 
 /** The places of the pattern room. */

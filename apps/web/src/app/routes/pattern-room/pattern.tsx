@@ -14,15 +14,18 @@ import { WhatItTakes } from '../../../features/patterns/components/what-it-takes
 import { layoutSubtitle } from '../../../features/patterns/layout-words.ts';
 import { patternQuery } from '../../../features/patterns/patterns.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
+import { pressesQuery } from '../../../features/presses/presses.queries.ts';
 import { ToolsTable } from '../../../features/tools/components/tools-table.tsx';
 import { toolsQuery } from '../../../features/tools/tools.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
+import { PressCard } from './press-card.tsx';
 
 export async function loader({ params }: LoaderFunctionArgs) {
   const id = Number(params['id']);
   const [pattern] = await Promise.all([
     queryClient.ensureQueryData(patternQuery(id)),
     queryClient.ensureQueryData(toolsQuery(id)),
+    queryClient.ensureQueryData(pressesQuery()),
   ]);
   return pattern;
 }
@@ -56,6 +59,7 @@ export function Component() {
             <WhatItTakes pattern={pattern} />
           </Card>
           <Tooling pattern={pattern} isOwner={isOwner} />
+          <PressCard pattern={pattern} />
           <Card title="Versions" subtitle="Quotes keep the version they were made with.">
             <VersionsList patternId={id} />
           </Card>

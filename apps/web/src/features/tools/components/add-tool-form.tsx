@@ -31,6 +31,10 @@ export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
         patternId,
         customerId: null,
         state: 'on the rack',
+        piecesPerStrike: 1,
+        ruleThicknessMm: null,
+        borderMm: null,
+        reliefAreaMm2: null,
       }}
       submitWord="Add the tool"
       draftKey="tool-new"
@@ -48,5 +52,7 @@ function FieldsOfKind() {
 
 /** What was chosen for a plate before it became a die is not sent. */
 function ofItsKind<Body extends { kind: ToolReply['kind'] }>(body: Body): Body {
-  return body.kind === 'cutting die' ? { ...body, metal: '', customerId: null } : body;
+  return body.kind === 'cutting die'
+    ? { ...body, metal: '', customerId: null, borderMm: null, reliefAreaMm2: null }
+    : { ...body, piecesPerStrike: 1, ruleThicknessMm: null };
 }

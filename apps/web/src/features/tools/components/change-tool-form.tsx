@@ -38,16 +38,11 @@ export function ChangeToolForm({ tool }: { tool: ToolReply }) {
   );
 }
 
-function typedOf({
-  name,
-  number,
-  metal,
-  cost,
-  lifeUses,
-  slot,
-  patternId,
-  customerId,
-  state,
-}: ToolReply) {
-  return { name, number, metal, cost, lifeUses, slot, patternId, customerId, state };
+function typedOf(tool: ToolReply) {
+  const { name, number, metal, cost, lifeUses, slot, patternId, customerId, state } = tool;
+  const { piecesPerStrike, ruleThicknessMm, borderMm, reliefAreaMm2 } = tool;
+  return {
+    ...{ name, number, metal, cost, lifeUses, slot, patternId, customerId, state },
+    ...{ piecesPerStrike, ruleThicknessMm, borderMm, reliefAreaMm2 },
+  };
 }

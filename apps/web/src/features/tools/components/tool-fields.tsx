@@ -1,5 +1,7 @@
 import { plateMetals, toolStates, type ToolReply } from '@hidewright/contract';
 import { useQuery } from '@tanstack/react-query';
+import { DecimalField } from '../../../components/decimal-field.tsx';
+import { LengthField } from '../../../components/length-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
@@ -80,7 +82,50 @@ export function ToolFields({ kind, isNew = false }: ToolFieldsProps) {
           choices={customers}
         />
       )}
+      {isPlate ? <PlateMeasures /> : <DieMeasures />}
       <SelectField name="state" label="State" choices={states} short />
+    </>
+  );
+}
+
+function DieMeasures() {
+  return (
+    <>
+      <NumberField
+        name="piecesPerStrike"
+        label="Pieces at one strike"
+        whenEmpty="text"
+        help="more than one where the die holds several"
+      />
+      <LengthField
+        name="ruleThicknessMm"
+        label="Thickness of the rule"
+        optional
+        whenEmpty="null"
+        help="how far the steel stands outside the outline; the spacing can be no less"
+      />
+    </>
+  );
+}
+
+function PlateMeasures() {
+  return (
+    <>
+      <LengthField
+        name="borderMm"
+        label="Border"
+        optional
+        whenEmpty="null"
+        help="how far the plate stands out around the outline; the spacing can be no less"
+      />
+      <DecimalField
+        name="reliefAreaMm2"
+        label="Relief"
+        unit="mm²"
+        optional
+        whenEmpty="null"
+        help="raised area that is pressed in; the engraver can tell"
+      />
     </>
   );
 }
