@@ -26,7 +26,7 @@ describe('Can we make it?', () => {
     expect(answers.map(({ sentence }) => sentence)).toEqual([
       'Russet side: take 8.0 ft² from L-1.',
       'Rivet: take 100 of 100 free.',
-      'Coaster die: ready, 5000 strikes left in it.',
+      'Coaster die: ready, 5,000 strikes left in it.',
       'Bench hours: 2.5 of the 10 free by 2027-03-05.',
     ]);
   });

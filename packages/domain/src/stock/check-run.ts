@@ -5,6 +5,7 @@ import {
   toAtMost,
   type DecimalText,
 } from '../numbers/decimal-text.ts';
+import { countWords } from '../numbers/count-words.ts';
 import { formatFootage } from '../units/footage.ts';
 import { chooseLots, type FreeLot, type LotTake } from './choose-lots.ts';
 
@@ -77,8 +78,8 @@ function hardwareAnswer(item: CheckInput['hardware'][number], at: number): Answe
   readWhole(item.free, `hardware.${at}.free`);
   const result = figures(String(item.needed), String(item.free), 0);
   const sentence = result.ok
-    ? `${item.name}: take ${item.needed} of ${item.free} free.`
-    : `${item.name}: ${item.needed} needed, ${item.free} free, ${result.short} short.`;
+    ? `${item.name}: take ${countWords(item.needed)} of ${countWords(item.free)} free.`
+    : `${item.name}: ${countWords(item.needed)} needed, ${countWords(item.free)} free, ${countWords(result.short)} short.`;
   return { about: 'hardware', name: item.name, unit: 'piece', ...result, sentence };
 }
 
@@ -101,10 +102,10 @@ function toolingAnswer(tool: CheckInput['tooling'][number], at: number): Answer 
 function toolSentence(tool: CheckInput['tooling'][number], ok: boolean): string {
   if (!tool.inShop) return `${tool.name}: not in the shop yet.`;
   if (!ok) {
-    return `${tool.name}: ${tool.strikesNeeded} strikes needed, ${tool.strikesLeft} left in it: order a new one.`;
+    return `${tool.name}: ${countWords(tool.strikesNeeded)} strikes needed, ${countWords(tool.strikesLeft ?? 0)} left in it: order a new one.`;
   }
   if (tool.strikesLeft === null) return `${tool.name}: ready.`;
-  return `${tool.name}: ready, ${tool.strikesLeft} strikes left in it.`;
+  return `${tool.name}: ready, ${countWords(tool.strikesLeft)} strikes left in it.`;
 }
 
 function hoursAnswer({
