@@ -26,6 +26,9 @@ export { cuttingEdgeMm, outlineArea, outlineBounds } from './outline/measure.ts'
 export { outlinePolygon } from './outline/polygon.ts';
 export { outlinePath } from './outline/outline-path.ts';
 export { describeOutline } from './outline/describe-outline.ts';
+export type * from './outline/drawing.ts';
+export { readDrawing } from './outline/read-drawing.ts';
+export { holesWithin, outlineFromDrawing } from './outline/outline-from-drawing.ts';
 
 export type * from './yield/layout.ts';
 export { layOut } from './yield/lay-out.ts';

@@ -1,12 +1,11 @@
 import { InvalidInput } from '../errors/domain-error.ts';
+import { checkDrawnPolygon } from './check-polygon.ts';
+import { largestMm, smallestMm } from './limits.ts';
 import type { Outline, Rectangle, Tag } from './outline.ts';
-
-const smallestMm = 1;
-const largestMm = 5000;
 
 /**
  * Refuses an outline that cannot be drawn: sizes from 1 to 5,000 mm, corners no rounder than the
- * shape allows, a neck narrower and shorter than its tag.
+ * shape allows, a neck narrower and shorter than its tag; a polygon as `checkDrawnPolygon` wants it.
  * @throws InvalidInput naming the measure to change
  */
 export function checkOutline(outline: Outline): void {
@@ -20,8 +19,10 @@ export function checkOutline(outline: Outline): void {
       return checkRectangle(outline);
     case 'tag':
       return checkTag(outline);
+    case 'polygon':
+      return checkDrawnPolygon(outline);
     default:
-      throw new InvalidInput('shape', 'Choose round, rectangle, oval or tag.');
+      throw new InvalidInput('shape', 'Choose round, rectangle, oval, tag or a drawing.');
   }
 }
 

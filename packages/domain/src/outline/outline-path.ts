@@ -1,22 +1,32 @@
 import { arcPoint, type Stretch } from './boundary.ts';
 import { checkOutline } from './check-outline.ts';
+import { centredHoles, centredPoints } from './drawn-polygon.ts';
 import type { Outline, Point } from './outline.ts';
 import { shapeOf } from './shape.ts';
 
 /**
  * The outline as SVG path data in mm, in the same coordinates as its polygon, so that a placement
  * is drawn by `translate(x y) rotate(rot)`. (On a screen, where y points down, the whole picture is
- * mirrored, which changes nothing in it.)
+ * mirrored, which changes nothing in it.) Holes run the other way round, so that they stay empty
+ * when the path is filled.
  * @throws InvalidInput
  */
 export function outlinePath(outline: Outline): string {
   checkOutline(outline);
+  if (outline.shape === 'polygon') {
+    return [centredPoints(outline), ...centredHoles(outline)].map(ringPath).join(' ');
+  }
   const shape = shapeOf(outline);
   if (shape.kind === 'ellipse') return ellipsePath(shape.radiusX, shape.radiusY);
   const [first, ...rest] = shape.stretches;
   if (first === undefined) return '';
   const begin = first.kind === 'line' ? first.from : arcPoint(first, 0);
   return [`M ${pair(begin)}`, ...[first, ...rest].map(command), 'Z'].join(' ');
+}
+
+/** A closed curve as path data, its corners in the order given. */
+export function ringPath(ring: readonly Point[]): string {
+  return `M ${ring.map(pair).join(' L ')} Z`;
 }
 
 function ellipsePath(radiusX: number, radiusY: number): string {

@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import type { Outline } from './outline.ts';
+import type { Outline, Point } from './outline.ts';
 
 const mm = (min: number, max: number) =>
   fc.integer({ min: min * 4, max: max * 4 }).map((quarters) => quarters / 4);
@@ -19,6 +19,7 @@ export const anOutline: fc.Arbitrary<Outline> = fc.oneof(
     cornerRadiusMm: (Math.min(widthMm, heightMm) / 2) * round,
   })),
   aTag(),
+  aStar(),
 );
 
 /** For the tests: tags with necks of all kinds. */
@@ -44,4 +45,19 @@ function aTag(): fc.Arbitrary<Outline> {
         cornerRadiusMm: most * round,
       };
     });
+}
+
+/** Corners at growing angles and any distance: convex or deeply notched, and never crossing itself. */
+function aStar(): fc.Arbitrary<Outline> {
+  return fc
+    .array(mm(8, 60), { minLength: 3, maxLength: 14 })
+    .map((radii): Outline => ({ shape: 'polygon', points: star(radii) }));
+}
+
+/** The corners lie in the middle of equal sectors, so that the origin is inside. */
+export function star(radii: readonly number[]): Point[] {
+  return radii.map((radius, at) => {
+    const angle = (2 * Math.PI * (at + 0.5)) / radii.length;
+    return { x: radius * Math.cos(angle), y: radius * Math.sin(angle) };
+  });
 }

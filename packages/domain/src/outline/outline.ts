@@ -2,7 +2,7 @@
  * The closed curve that a cutting die cuts, by its measures in mm. Every outline lies with the
  * middle of its bounding box at the origin.
  */
-export type Outline = Round | Rectangle | Oval | Tag;
+export type Outline = Round | Rectangle | Oval | Tag | DrawnPolygon;
 
 export interface Round {
   shape: 'round';
@@ -36,6 +36,18 @@ export interface Tag {
   neckLengthMm: number;
   neckWidthMm: number;
   cornerRadiusMm: number;
+}
+
+/**
+ * A shape of its own: 3 to 3,000 corners in mm, either way round, without the first repeated at the
+ * end. They may lie anywhere and are rounded to 1 µm; the shape is moved to the origin by whole
+ * micrometres. `punched` are closed curves inside it, holes and slots that the die cuts as well:
+ * drawn and counted in the cutting edge, of no account to how pieces lie.
+ */
+export interface DrawnPolygon {
+  shape: 'polygon';
+  points: readonly Point[];
+  punched?: readonly (readonly Point[])[] | undefined;
 }
 
 export interface Point {

@@ -1,12 +1,15 @@
 import { InvalidInput } from '../errors/domain-error.ts';
 import { arcPoint, type Stretch } from './boundary.ts';
 import { checkOutline } from './check-outline.ts';
+import { centredPoints } from './drawn-polygon.ts';
 import type { Outline, Point } from './outline.ts';
+import { toMicrometre, withoutRepeats } from './ring.ts';
 import { shapeOf } from './shape.ts';
 
 /**
  * The outline as a polygon, counter-clockwise, in mm rounded to 1 µm. Its corners lie on the curve,
- * which leaves it by `toleranceMm` at most; the widest and highest points are among them.
+ * which leaves it by `toleranceMm` at most; the widest and highest points are among them. A drawn
+ * polygon is given as it is, without its holes.
  * @throws InvalidInput
  */
 export function outlinePolygon(outline: Outline, toleranceMm = 0.01): Point[] {
@@ -14,6 +17,7 @@ export function outlinePolygon(outline: Outline, toleranceMm = 0.01): Point[] {
   if (!(toleranceMm >= 0.0001 && toleranceMm <= 10)) {
     throw new InvalidInput('toleranceMm', 'Write the tolerance as 0.0001 to 10 mm.');
   }
+  if (outline.shape === 'polygon') return centredPoints(outline);
   const shape = shapeOf(outline);
   const points =
     shape.kind === 'ellipse'
@@ -41,17 +45,4 @@ function stretchPoints(stretch: Stretch, toleranceMm: number): Point[] {
   const step = widestStep(stretch.radius, toleranceMm);
   const count = Math.max(1, Math.ceil(Math.abs(stretch.sweep) / step));
   return Array.from({ length: count + 1 }, (_, at) => arcPoint(stretch, at / count));
-}
-
-// Rounding the size and putting the sign back keeps an outline that is symmetrical symmetrical.
-const micrometre = (value: number): number =>
-  (Math.sign(value) * Math.round(Math.abs(value) * 1000)) / 1000 + 0;
-
-const toMicrometre = ({ x, y }: Point): Point => ({ x: micrometre(x), y: micrometre(y) });
-
-function withoutRepeats(points: Point[]): Point[] {
-  return points.filter((point, at) => {
-    const before = points[(at + points.length - 1) % points.length];
-    return before === undefined || point.x !== before.x || point.y !== before.y;
-  });
 }

@@ -1,5 +1,6 @@
 import { type Corner, roundCorners, type Stretch, tangentLength } from './boundary.ts';
-import type { Outline, Rectangle, Tag } from './outline.ts';
+import { centredPoints } from './drawn-polygon.ts';
+import type { Outline, Point, Rectangle, Tag } from './outline.ts';
 
 /** An outline as geometry: an ellipse about the origin, or a closed chain of lines and arcs. */
 export type Shape =
@@ -20,8 +21,13 @@ export function shapeOf(outline: Outline): Shape {
       return { kind: 'chain', stretches: roundCorners(rectangleCorners(outline)) };
     case 'tag':
       return { kind: 'chain', stretches: roundCorners(tagCorners(outline)) };
+    case 'polygon':
+      return { kind: 'chain', stretches: straightLines(centredPoints(outline)) };
   }
 }
+
+const straightLines = (ring: readonly Point[]): Stretch[] =>
+  ring.map((from, at) => ({ kind: 'line', from, to: ring[(at + 1) % ring.length] as Point }));
 
 function rectangleCorners({ widthMm, heightMm, cornerRadiusMm: radius }: Rectangle): Corner[] {
   const [x, y] = [widthMm / 2, heightMm / 2];
