@@ -1,7 +1,8 @@
+import { DomainError, InvalidInput, sideLimits, soundSide } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { id, idParams, line, optionalLine, page, pageQuery, version } from './fields.ts';
+import { id, idParams, line, optionalLine, page, pageQuery, percent, version } from './fields.ts';
 
 /** The forms that leather comes in and becomes. */
 export const lotForms = [
@@ -91,4 +92,60 @@ export const changeLot = endpoint({
     })
     .partial(),
   reply: lot,
+});
+
+const point = z.strictObject({ x: z.number(), y: z.number() });
+const curve = (most: number) =>
+  z.array(point).min(3, 'Draw at least three corners.').max(most, `Draw at most ${most} corners.`);
+
+/** A lot's edge and flaws in mm, as drawn, and what share of it can be used where nothing is drawn. */
+const drawing = {
+  outline: curve(sideLimits.outlineCorners).nullable(),
+  flaws: z
+    .array(curve(sideLimits.flawCorners))
+    .max(sideLimits.flaws, `Draw at most ${sideLimits.flaws} flaws; join small ones.`),
+  usablePercent: percent.refine((text) => Number(text) >= 1, 'Enter 1 % or more.'),
+};
+
+const lotDrawing = z
+  .object({ ...drawing, usablePercent: z.string(), version })
+  .meta({ id: 'LotDrawing' });
+export type LotDrawing = z.infer<typeof lotDrawing>;
+
+export const readLotDrawing = endpoint({
+  method: 'GET',
+  path: '/lots/{id}/drawing',
+  summary: 'The edge and flaws of a lot as drawn',
+  access: ['owner', 'maker'],
+  params: idParams,
+  reply: lotDrawing,
+});
+
+export const drawLot = endpoint({
+  method: 'PUT',
+  path: '/lots/{id}/drawing',
+  summary: 'Draw a lot’s edge and flaws, or say what share of it can be used',
+  access: ['owner', 'maker'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject(drawing).superRefine((drawn, context) => {
+    if (context.issues.length > 0) return;
+    if (drawn.outline === null && drawn.flaws.length === 0) return;
+    if (drawn.outline === null) {
+      context.addIssue({
+        code: 'custom',
+        path: ['outline'],
+        message: 'Draw the edge before the flaws.',
+      });
+      return;
+    }
+    try {
+      soundSide({ outline: drawn.outline, flaws: drawn.flaws });
+    } catch (error) {
+      if (!(error instanceof DomainError)) throw error;
+      const path = error instanceof InvalidInput ? error.field.split('.') : [];
+      context.addIssue({ code: 'custom', path, message: error.message });
+    }
+  }),
+  reply: lotDrawing,
 });

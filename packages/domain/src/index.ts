@@ -35,6 +35,8 @@ export { layOut } from './yield/lay-out.ts';
 export { handCount } from './yield/hand-count.ts';
 export { layoutInputKey } from './yield/layout-input-key.ts';
 
+export * from './leather/drawn-side.ts';
+
 export * from './press/press-load.ts';
 
 export * from './rejects/cut-count.ts';

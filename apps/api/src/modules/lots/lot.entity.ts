@@ -1,11 +1,13 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
-import type { Decimal } from 'decimal.js';
-import { AreaType, LengthType, MoneyType } from '../../db/columns/columns.ts';
+import { Decimal } from 'decimal.js';
+import { AreaType, LengthType, MoneyType, PercentType } from '../../db/columns/columns.ts';
+import { JsonText } from '../../db/columns/json-text.ts';
 
 /** One side, hide or bundle of panels on the rack. */
 @Entity({ tableName: 'lot' })
 export class Lot {
-  [OptionalProps]?: 'pieces' | 'grade' | 'shade' | 'place' | 'supplierLot' | 'version';
+  [OptionalProps]?:
+    'pieces' | 'grade' | 'shade' | 'place' | 'supplierLot' | 'usablePercent' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -66,6 +68,18 @@ export class Lot {
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   parentId: number | null = null;
+
+  /** Its edge as drawn, in mm; null where nobody drew it. */
+  @Property({ type: JsonText, columnType: 'text', nullable: true })
+  outline: unknown = null;
+
+  /** Closed curves around what is not cut. */
+  @Property({ type: JsonText, columnType: 'text' })
+  flaws: unknown = [];
+
+  /** The share of its area that can be cut, where its edge is not drawn. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  usablePercent: Decimal = new Decimal(85);
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;

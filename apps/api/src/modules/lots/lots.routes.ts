@@ -1,11 +1,21 @@
 import { Router } from 'express';
-import { changeLot, listLots, readLot } from '@hidewright/contract';
+import { soundSide } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import {
+  changeLot,
+  drawLot,
+  listLots,
+  readLot,
+  readLotDrawing,
+  type LotDrawing,
+} from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { notFound } from '../../http/problem.ts';
 import { serve } from '../../http/serve.ts';
+import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { requireFreeTag } from './lot-tags.ts';
 import { Lot } from './lot.entity.ts';
@@ -23,8 +33,7 @@ export function lotRoutes(context: Context): Router {
   serve(router, context, readLot, async ({ em }, { params }) => readOneLot(em, params.id));
 
   serve(router, context, changeLot, async (work, { params, body, ifMatch }) => {
-    const lot = await work.em.findOne(Lot, params.id);
-    if (lot === null) throw notFound('lot');
+    const lot = await findLot(work.em, params.id);
     await requireVersion(work.em, { kind: 'lot', id: lot.id, version: lot.version }, ifMatch);
     if (body.tag !== undefined) await requireFreeTag(work.em, body.tag, 'tag', lot.id);
     assignDefined(lot, body);
@@ -38,5 +47,38 @@ export function lotRoutes(context: Context): Router {
     return readOneLot(work.em, lot.id);
   });
 
+  serve(router, context, readLotDrawing, async ({ em }, { params }) =>
+    drawingOf(await findLot(em, params.id)),
+  );
+
+  serve(router, context, drawLot, async (work, { params, body, ifMatch }) => {
+    const lot = await findLot(work.em, params.id);
+    await requireVersion(work.em, { kind: 'lot', id: lot.id, version: lot.version }, ifMatch);
+    const { outline, flaws, usablePercent } = body;
+    const sound = outline === null ? { outline, flaws: [] } : soundSide({ outline, flaws });
+    assignDefined(lot, { ...sound, usablePercent: new Decimal(usablePercent) });
+    await work.em.flush();
+    await logDeed(work, {
+      action: `drew lot ${lot.tag} with ${sound.flaws.length} flaws`,
+      subjectKind: 'lot',
+      subjectId: lot.id,
+    });
+    return drawingOf(lot);
+  });
+
   return router;
 }
+
+/** @throws {Problem} 404 */
+async function findLot(em: Work['em'], id: number): Promise<Lot> {
+  const lot = await em.findOne(Lot, id);
+  if (lot === null) throw notFound('lot');
+  return lot;
+}
+
+const drawingOf = (lot: Lot): LotDrawing => ({
+  outline: lot.outline as LotDrawing['outline'],
+  flaws: lot.flaws as LotDrawing['flaws'],
+  usablePercent: lot.usablePercent.toString(),
+  version: lot.version,
+});

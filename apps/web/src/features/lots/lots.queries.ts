@@ -1,4 +1,4 @@
-import { listLots, readLot } from '@hidewright/contract';
+import { listLots, readLot, readLotDrawing } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -25,5 +25,13 @@ export function lotQuery(id: number) {
   return queryOptions({
     queryKey: ['lots', id],
     queryFn: ({ signal }) => call(readLot, { params: { id }, signal }),
+  });
+}
+
+/** The lot's edge and flaws as drawn. */
+export function lotDrawingQuery(id: number) {
+  return queryOptions({
+    queryKey: ['lots', id, 'drawing'],
+    queryFn: ({ signal }) => call(readLotDrawing, { params: { id }, signal }),
   });
 }

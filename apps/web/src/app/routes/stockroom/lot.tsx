@@ -7,6 +7,7 @@ import { PageTitle } from '../../../components/page-title.tsx';
 import { Ticket } from '../../../components/ticket.tsx';
 import { ChangeLotForm } from '../../../features/lots/components/change-lot-form.tsx';
 import { LotFacts } from '../../../features/lots/components/lot-facts.tsx';
+import { SideCard } from '../../../features/lots/components/side-card.tsx';
 import { formText } from '../../../features/lots/lot-words.ts';
 import { lotQuery } from '../../../features/lots/lots.queries.ts';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
@@ -50,6 +51,7 @@ export function Component() {
         }
         aside={<HeldAndAdjust item={item} handlesStock={handlesStock} />}
       >
+        {handlesStock && lot.form !== 'panel' && lot.form !== 'strip' && <SideCard lot={lot} />}
         <Card title="Movements">
           <MovementsTable item={item} />
         </Card>

@@ -1,0 +1,159 @@
+import type { Point } from '@hidewright/domain';
+import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
+import { boxOf, curvePath, type SideSketch } from '../side-sketch.ts';
+
+interface SideCanvasProps {
+  sketch: SideSketch;
+  /** Which part the hand works on. */
+  works: 'flaws' | 'edge';
+  onCorner: (at: Point) => void;
+  onClose: () => void;
+  onDrop: () => void;
+  onMoveCorner: (at: number, to: Point) => void;
+}
+
+const steps: Record<string, [number, number]> = {
+  ArrowLeft: [-1, 0],
+  ArrowRight: [1, 0],
+  ArrowUp: [0, -1],
+  ArrowDown: [0, 1],
+};
+
+/** How far an arrow key goes, in mm: with Shift held, and without. */
+const stride = (event: KeyboardEvent): number => (event.shiftKey ? 50 : 10);
+
+/** The side, to be drawn on: with mouse or finger around a flaw, or with a crosshair that the arrow keys move. */
+export function SideCanvas(props: SideCanvasProps) {
+  const { sketch, works, onCorner, onClose, onDrop } = props;
+  const svg = useRef<SVGSVGElement>(null);
+  const box = boxOf(sketch.outline);
+  const margin = Math.max(box.width, box.height) * 0.03;
+  const [cross, setCross] = useState<Point>({
+    x: Math.round(box.x + box.width / 2),
+    y: Math.round(box.y + box.height / 2),
+  });
+  const [drawing, setDrawing] = useState(false);
+  const place = (event: PointerEvent): Point => placeOn(svg.current, event);
+
+  function move(event: KeyboardEvent): void {
+    const step = steps[event.key];
+    if (step) {
+      const by = stride(event);
+      setCross(({ x, y }) => ({ x: x + step[0] * by, y: y + step[1] * by }));
+    } else if (event.key === 'Enter') onCorner(cross);
+    else if (event.key === ' ') onClose();
+    else if (event.key === 'Escape' && sketch.underWay.length > 0) onDrop();
+    else return;
+    event.preventDefault();
+  }
+
+  return (
+    <svg
+      ref={svg}
+      viewBox={`${box.x - margin} ${box.y - margin} ${box.width + 2 * margin} ${box.height + 2 * margin}`}
+      className="block h-auto max-h-[32rem] w-full touch-none rounded bg-paper"
+      role={works === 'flaws' ? 'application' : 'group'}
+      aria-label={
+        works === 'flaws'
+          ? 'The side. Arrow keys move the crosshair, Enter marks a corner of a flaw, Space closes it, Escape drops it.'
+          : 'The side. Each corner of its edge can be moved with the arrow keys.'
+      }
+      tabIndex={works === 'flaws' ? 0 : undefined}
+      onKeyDown={works === 'flaws' ? move : undefined}
+      onPointerDown={(event) => {
+        if (works !== 'flaws') return;
+        event.currentTarget.setPointerCapture(event.pointerId);
+        setDrawing(true);
+        onCorner(place(event));
+      }}
+      onPointerMove={(event) => drawing && onCorner(place(event))}
+      onPointerUp={() => {
+        if (!drawing) return;
+        setDrawing(false);
+        onClose();
+      }}
+    >
+      <path
+        d={curvePath(sketch.outline)}
+        className="fill-panel stroke-edge"
+        strokeWidth={1.5}
+        vectorEffect="non-scaling-stroke"
+      />
+      {sketch.flaws.map((flaw, at) => (
+        <path
+          key={at}
+          d={curvePath(flaw)}
+          className="fill-oxblood/30 stroke-oxblood"
+          strokeWidth={1.5}
+          vectorEffect="non-scaling-stroke"
+        />
+      ))}
+      {sketch.underWay.length > 0 && (
+        <path
+          d={`M ${sketch.underWay.map(({ x, y }) => `${x} ${y}`).join(' L ')}`}
+          className="fill-none stroke-oxblood"
+          strokeWidth={2}
+          strokeDasharray="5 3"
+          vectorEffect="non-scaling-stroke"
+        />
+      )}
+      {works === 'flaws' ? (
+        <Crosshair at={cross} size={box.width * 0.02} />
+      ) : (
+        <Corners {...props} size={box.width * 0.009} place={place} />
+      )}
+    </svg>
+  );
+}
+
+function placeOn(svg: SVGSVGElement | null, { clientX, clientY }: PointerEvent): Point {
+  const matrix = svg?.getScreenCTM();
+  if (!matrix) return { x: 0, y: 0 };
+  const { x, y } = new DOMPoint(clientX, clientY).matrixTransform(matrix.inverse());
+  return { x, y };
+}
+
+function Crosshair({ at: { x, y }, size }: { at: Point; size: number }) {
+  return (
+    <path
+      d={`M ${x - size} ${y} H ${x + size} M ${x} ${y - size} V ${y + size}`}
+      className="fill-none stroke-ink"
+      strokeWidth={1.5}
+      vectorEffect="non-scaling-stroke"
+      aria-hidden="true"
+    />
+  );
+}
+
+interface CornersProps extends SideCanvasProps {
+  size: number;
+  place: (event: PointerEvent) => Point;
+}
+
+function Corners({ sketch, size, place, onMoveCorner }: CornersProps) {
+  return sketch.outline.map((corner, at) => (
+    <circle
+      key={at}
+      cx={corner.x}
+      cy={corner.y}
+      r={size}
+      role="button"
+      tabIndex={0}
+      aria-label={`Corner ${at + 1}: ${corner.x}, ${corner.y} mm`}
+      className="cursor-move fill-verdigris stroke-card"
+      strokeWidth={1.5}
+      vectorEffect="non-scaling-stroke"
+      onPointerDown={(event) => event.currentTarget.setPointerCapture(event.pointerId)}
+      onPointerMove={(event) => {
+        if (event.currentTarget.hasPointerCapture(event.pointerId)) onMoveCorner(at, place(event));
+      }}
+      onKeyDown={(event) => {
+        const step = steps[event.key];
+        if (!step) return;
+        event.preventDefault();
+        const by = stride(event);
+        onMoveCorner(at, { x: corner.x + step[0] * by, y: corner.y + step[1] * by });
+      }}
+    />
+  ));
+}

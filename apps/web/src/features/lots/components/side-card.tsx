@@ -1,0 +1,82 @@
+import type { Lot } from '@hidewright/contract';
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { Card } from '../../../components/card.tsx';
+import { boxOf, curvePath } from '../side-sketch.ts';
+import { lotDrawingQuery } from '../lots.queries.ts';
+import { SideEditor } from './side-editor.tsx';
+
+/** The lot's edge and flaws, and drawing them. */
+export function SideCard({ lot }: { lot: Lot }) {
+  const { data: drawing } = useQuery(lotDrawingQuery(lot.id));
+  const [editing, setEditing] = useState(false);
+  if (!drawing) return null;
+  const flaws = drawing.flaws.length;
+  return (
+    <Card
+      title="Edge and flaws"
+      subtitle={
+        drawing.outline === null ? 'not drawn yet' : `${flaws} ${flaws === 1 ? 'flaw' : 'flaws'}`
+      }
+      aside={
+        !editing && (
+          <Button onClick={() => setEditing(true)}>
+            {drawing.outline === null ? 'Draw it' : 'Change the drawing'}
+          </Button>
+        )
+      }
+    >
+      {editing ? (
+        <SideEditor
+          key={drawing.version}
+          lot={lot}
+          drawing={drawing}
+          onDone={() => setEditing(false)}
+        />
+      ) : (
+        <Drawn outline={drawing.outline} flaws={drawing.flaws} />
+      )}
+    </Card>
+  );
+}
+
+interface DrawnProps {
+  outline: { x: number; y: number }[] | null;
+  flaws: { x: number; y: number }[][];
+}
+
+function Drawn({ outline, flaws }: DrawnProps) {
+  if (outline === null) {
+    return (
+      <p className="text-ink-soft">
+        Drawn with its flaws, a layout shows how many pieces this one really gives.
+      </p>
+    );
+  }
+  const { x, y, width, height } = boxOf(outline);
+  return (
+    <svg
+      role="img"
+      aria-label={`The side as drawn, with ${flaws.length} flaws`}
+      viewBox={`${x - 10} ${y - 10} ${width + 20} ${height + 20}`}
+      className="block h-auto max-h-80 w-full"
+    >
+      <path
+        d={curvePath(outline)}
+        className="fill-panel stroke-edge"
+        strokeWidth={1.5}
+        vectorEffect="non-scaling-stroke"
+      />
+      {flaws.map((flaw, at) => (
+        <path
+          key={at}
+          d={curvePath(flaw)}
+          className="fill-oxblood/30 stroke-oxblood"
+          strokeWidth={1.5}
+          vectorEffect="non-scaling-stroke"
+        />
+      ))}
+    </svg>
+  );
+}
