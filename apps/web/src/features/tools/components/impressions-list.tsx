@@ -34,7 +34,7 @@ export function ImpressionsList({ tool }: { tool: ToolReply }) {
 
 function Row({ row }: { row: ImpressionReply }) {
   const { timeZone } = useWorkshop();
-  const why = [row.jobNumber, row.reason].filter(Boolean).join(', ');
+  const why = [...new Set([row.jobNumber, row.reason])].filter(Boolean).join(', ');
   return (
     <li className="flex justify-between gap-4">
       <span>
