@@ -1,0 +1,89 @@
+import type { Bounds, Point } from '../outline/outline.ts';
+import { ringBounds } from './ring.ts';
+import type { Ring } from './problem.ts';
+
+/** A half plane: x · nx + y · ny ≥ d. */
+export interface HalfPlane {
+  nx: number;
+  ny: number;
+  d: number;
+}
+
+/** The edges of no-fit polygons, flat: from and to of each, counter-clockwise. */
+export class Edges {
+  readonly bounds: Bounds;
+  readonly #ends: Float64Array;
+
+  constructor(rings: readonly Ring[]) {
+    this.bounds = ringBounds(rings);
+    const ends: number[] = [];
+    for (const ring of rings) {
+      let from = ring[ring.length - 1] as Point;
+      for (const to of ring) {
+        if (Math.hypot(to.x - from.x, to.y - from.y) > 1e-9) ends.push(from.x, from.y, to.x, to.y);
+        from = to;
+      }
+    }
+    this.#ends = Float64Array.from(ends);
+  }
+
+  /** A convex part of what is free around a point outside: as half planes, within the given reach. */
+  freeCell(x: number, y: number, reach: number): HalfPlane[] {
+    const near = this.#near(x, y, reach);
+    const cell: HalfPlane[] = [];
+    for (const { at } of near) {
+      const ends = this.#clipped(at, x, y, reach);
+      const shut = cell.some(({ nx, ny, d }) =>
+        ends.every((end) => nx * end.x + ny * end.y <= d + 1e-9),
+      );
+      if (!shut) cell.push(this.#separating(at, x, y));
+    }
+    return cell;
+  }
+
+  #near(x: number, y: number, reach: number): { at: number; far: number; beyond: number }[] {
+    const ends = this.#ends;
+    const near: { at: number; far: number; beyond: number }[] = [];
+    for (let at = 0; at < ends.length; at += 4) {
+      const [x0, y0] = [(ends[at] as number) - x, (ends[at + 1] as number) - y];
+      const [x1, y1] = [(ends[at + 2] as number) - x, (ends[at + 3] as number) - y];
+      if ((x0 > reach && x1 > reach) || (x0 < -reach && x1 < -reach)) continue;
+      if ((y0 > reach && y1 > reach) || (y0 < -reach && y1 < -reach)) continue;
+      const [dx, dy] = [x1 - x0, y1 - y0];
+      const long = Math.hypot(dx, dy);
+      const share = Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / (long * long)));
+      const far = Math.hypot(x0 + share * dx, y0 + share * dy);
+      // On the right-hand side of a counter-clockwise edge it is free.
+      if (far < reach) near.push({ at, far, beyond: (x0 * dy - y0 * dx) / -long });
+    }
+    return near.sort((a, b) => (Math.abs(a.far - b.far) < 1e-7 ? b.beyond - a.beyond : a.far - b.far));
+  }
+
+  #clipped(at: number, x: number, y: number, reach: number): Point[] {
+    const ends = this.#ends;
+    const [x0, y0] = [ends[at] as number, ends[at + 1] as number];
+    const [dx, dy] = [(ends[at + 2] as number) - x0, (ends[at + 3] as number) - y0];
+    const long = Math.hypot(dx, dy);
+    const middle = ((x - x0) * dx + (y - y0) * dy) / long;
+    const from = Math.max(0, middle - reach) / long;
+    const to = Math.min(long, middle + reach) / long;
+    return [from, to].map((share) => ({ x: x0 + share * dx, y: y0 + share * dy }));
+  }
+
+  /** The edge's own line where the point lies beyond it, else the line square to the way there. */
+  #separating(at: number, x: number, y: number): HalfPlane {
+    const ends = this.#ends;
+    const [x0, y0] = [ends[at] as number, ends[at + 1] as number];
+    const [dx, dy] = [(ends[at + 2] as number) - x0, (ends[at + 3] as number) - y0];
+    const long = Math.hypot(dx, dy);
+    const [nx, ny] = [dy / long, -dx / long];
+    const beyond = (x - x0) * nx + (y - y0) * ny;
+    if (beyond > -1e-9) return { nx, ny, d: nx * x0 + ny * y0 };
+    const share = Math.min(1, Math.max(0, ((x - x0) * dx + (y - y0) * dy) / (long * long)));
+    const [px, py] = [x0 + share * dx, y0 + share * dy];
+    const far = Math.hypot(x - px, y - py);
+    if (far < 1e-6) return { nx, ny, d: nx * x0 + ny * y0 };
+    const [mx, my] = [(x - px) / far, (y - py) / far];
+    return { nx: mx, ny: my, d: mx * px + my * py };
+  }
+}

@@ -1,0 +1,156 @@
+import type { Crystal } from './crystal.ts';
+import type { Ring, NestPlacement } from './problem.ts';
+
+/** How a pattern lies over a room: its origin as shares of its steps, and what it then gives. */
+export interface Phase {
+  count: number;
+  u: number;
+  v: number;
+}
+
+/** A room's edges in steps of the pattern, one list per member: u0, v0, u1, v1. */
+type Edges = Float64Array;
+
+/** Counts the pieces that a pattern gives in a room and finds how it must lie to give most. */
+export class PhaseSearch {
+  readonly #members: readonly Edges[];
+  readonly #crystal: Crystal;
+
+  /** @param free for each of the pattern's members, the region that its origin may take */
+  constructor(crystal: Crystal, free: readonly (readonly Ring[])[]) {
+    this.#crystal = crystal;
+    this.#members = crystal.members.map(({ at }, member) =>
+      edgesOf(crystal, free[member] ?? [], at.x, at.y),
+    );
+  }
+
+  /** The best along every line: exact in one direction, in the other at what is tried. */
+  best(tries: number): Phase {
+    let best: Phase = { count: 0, u: 0, v: 0 };
+    const look = (v: number) => {
+      const phase = this.#alongLine(v - Math.floor(v));
+      if (phase.count > best.count) best = phase;
+    };
+    for (const v of this.#corners()) look(v);
+    for (let at = 0; at < tries; at += 1) look((at + 0.5) / tries);
+    for (let step = 0.25; tries > 0 && step > 0.05; step /= 2) {
+      const { v } = best;
+      for (const side of [-step, step]) look(v + side / tries);
+    }
+    return best;
+  }
+
+  /** The places of all pieces, row by row. */
+  placements({ u, v }: Phase, turns: readonly number[]): NestPlacement[] {
+    const { along, across, members } = this.#crystal;
+    return members.flatMap(({ at }, member) => {
+      const found: NestPlacement[] = [];
+      for (const [line, from, to] of spans(this.#members[member] as Edges, v)) {
+        for (let i = Math.ceil(from - u); i <= to - u; i += 1) {
+          const [a, b] = [u + i, v + line];
+          found.push({
+            x: at.x + a * along.x + b * across.x,
+            y: at.y + a * along.y + b * across.y,
+            rot: turns[member] as number,
+          });
+        }
+      }
+      return found;
+    });
+  }
+
+  /** Lines through (all but through) the room's corners, if it has few. */
+  #corners(): number[] {
+    return this.#members.flatMap((edges) => {
+      if (edges.length > 4 * 8) return [];
+      return Array.from({ length: edges.length / 4 }, (_, at) => edges[at * 4 + 1] as number).flatMap(
+        (v) => [v + nudge, v - nudge],
+      );
+    });
+  }
+
+  #alongLine(v: number): Phase {
+    const starts: number[] = [];
+    const ends: number[] = [];
+    let base = 0;
+    for (const edges of this.#members) {
+      for (const [, from, to] of spans(edges, v)) {
+        base += Math.floor(to) - Math.ceil(from) + 1;
+        if (from > Math.floor(from)) starts.push(from - Math.floor(from));
+        ends.push(to - Math.floor(to));
+      }
+    }
+    const { gain, u } = mostAtOnce(starts, ends);
+    return { count: base + gain, u, v };
+  }
+}
+
+/** In shares of a step: within what the room is drawn larger by. */
+const nudge = 1e-9;
+
+/** After each start one more, past each end one fewer: where is the most, from 0 to 1. */
+function mostAtOnce(starts: number[], ends: number[]): { gain: number; u: number } {
+  starts.sort((a, b) => a - b);
+  ends.sort((a, b) => a - b);
+  let [gain, best, u] = [0, 0, Math.min(1, ends[0] ?? 1) / 2];
+  if ((starts[0] ?? 1) < u * 2) u = (starts[0] as number) / 2;
+  let passed = 0;
+  for (let at = 0; at < starts.length; at += 1) {
+    const start = starts[at] as number;
+    while (passed < ends.length && (ends[passed] as number) < start) {
+      passed += 1;
+      gain -= 1;
+    }
+    gain += 1;
+    if (gain > best) {
+      best = gain;
+      const until = Math.min(ends[passed] ?? 1, 1);
+      u = (start + Math.max(start, until)) / 2;
+    }
+  }
+  return { gain: best, u };
+}
+
+function edgesOf({ along, across }: Crystal, rings: readonly Ring[], x: number, y: number): Edges {
+  const cross = along.x * across.y - along.y * across.x;
+  const edges: number[] = [];
+  for (const ring of rings) {
+    const inSteps = ring.map((point) => {
+      const [dx, dy] = [point.x - x, point.y - y];
+      return [
+        (dx * across.y - dy * across.x) / cross,
+        (along.x * dy - along.y * dx) / cross,
+      ] as const;
+    });
+    let from = inSteps[inSteps.length - 1];
+    for (const to of inSteps) {
+      if (from) edges.push(from[0], from[1], to[0], to[1]);
+      from = to;
+    }
+  }
+  return Float64Array.from(edges);
+}
+
+/** The stretches of the lines v, v + 1, … that lie in the room: line, from u, to u. */
+function spans(edges: Edges, v: number): [line: number, from: number, to: number][] {
+  const lines = new Map<number, number[]>();
+  for (let at = 0; at < edges.length; at += 4) {
+    const [v0, v1] = [edges[at + 1] as number, edges[at + 3] as number];
+    const [low, high] = v0 < v1 ? [v0, v1] : [v1, v0];
+    for (let line = Math.ceil(low - v); line + v < high; line += 1) {
+      const [u0, u1] = [edges[at] as number, edges[at + 2] as number];
+      const u = u0 + ((line + v - v0) / (v1 - v0)) * (u1 - u0);
+      const others = lines.get(line);
+      if (others) others.push(u);
+      else lines.set(line, [u]);
+    }
+  }
+  const found: [number, number, number][] = [];
+  for (const [line, us] of lines) {
+    us.sort((a, b) => a - b);
+    for (let at = 0; at + 1 < us.length; at += 2) {
+      found.push([line, us[at] as number, us[at + 1] as number]);
+    }
+  }
+  return found;
+}
