@@ -39,6 +39,16 @@ export * from './leather/drawn-side.ts';
 
 export * from './press/press-load.ts';
 
+export type * from './nest/problem.ts';
+export { planRegular } from './nest/plan-regular.ts';
+export { findBest } from './nest/find-best.ts';
+export type { BestSearch } from './nest/find-best.ts';
+export { nestBounds } from './nest/bounds.ts';
+export type { NestBounds } from './nest/bounds.ts';
+export { nestFaults } from './nest/nest-faults.ts';
+export { readNestCase } from './nest/case-file.ts';
+export { nestAnswer } from './nest/answer-nest.ts';
+
 export * from './rejects/cut-count.ts';
 export * from './rejects/allowance.ts';
 

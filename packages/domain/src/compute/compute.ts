@@ -1,6 +1,7 @@
 import { InvalidInput } from '../errors/domain-error.ts';
 import { Exact, toPlaces } from '../numbers/decimal-text.ts';
 import { allocate } from '../money/allocate.ts';
+import { answerNest } from '../nest/answer-nest.ts';
 import { round } from '../money/round.ts';
 import { rolledYield } from '../rejects/allowance.ts';
 import { cutCount } from '../rejects/cut-count.ts';
@@ -15,6 +16,7 @@ const answers: Record<string, (input: unknown) => Answer> = {
   allocate: answerAllocate,
   round: answerRound,
   convert: answerConvert,
+  layout: (input) => ({ ...answerNest(input) }),
 };
 
 /** What `compute` can answer. */

@@ -1,8 +1,10 @@
-import type { Crystal } from './crystal.ts';
-import { areaPerPiece } from './crystal.ts';
+import { areaPerPiece, type Crystal } from './crystal.ts';
+import { deepestConflict } from './crystal-faults.ts';
 import { PhaseSearch, type Phase } from './phase.ts';
-import type { NestPlacement } from './problem.ts';
+import type { NestPlacement, Ring } from './problem.ts';
+import { turned } from './ring.ts';
 import type { Room } from './room.ts';
+import type { NoFitPair } from './row-frame.ts';
 
 /** A pattern as it lies in the container, with the turn of its upright pieces. */
 export interface Candidate {
@@ -14,29 +16,30 @@ export interface Candidate {
 /** The best candidates seen so far, the first of equals before the others. */
 export class Candidates {
   readonly #room: Room;
-  readonly #most: number;
+  readonly #noFit: NoFitPair;
   readonly #kept: Candidate[] = [];
 
-  constructor(room: Room, most: number) {
+  constructor(room: Room, noFit: NoFitPair) {
     this.#room = room;
-    this.#most = most;
+    this.#noFit = noFit;
   }
 
-  /** @param tries how many lines of the pattern are looked along, besides the room's corners */
-  consider(crystal: Crystal, rot: number, tries: number): void {
+  /**
+   * Keeps a pattern that gives more than the best so far and can be cut.
+   * @param tries how many lines of the pattern are looked along, besides the room's corners
+   */
+  consider(crystal: Crystal, rot: number, tries: number, lines: readonly number[] = []): void {
     if (!(areaPerPiece(crystal) > 1e-6)) return;
-    const free = crystal.members.map(({ turn }) => this.#room.free(fullTurn(rot + turn)));
+    const free = this.#freeFor(crystal, rot);
     if (free.every((rings) => rings.length === 0)) return;
-    const phase = new PhaseSearch(crystal, free).best(tries);
-    if (phase.count <= this.#worst()) return;
-    const after = this.#kept.findIndex((other) => other.phase.count < phase.count);
-    this.#kept.splice(after < 0 ? this.#kept.length : after, 0, { crystal, rot, phase });
-    if (this.#kept.length > this.#most) this.#kept.pop();
+    const phase = new PhaseSearch(crystal, free).best(tries, lines);
+    if (phase.count <= this.most || !this.#canBeCut(crystal, rot)) return;
+    this.#kept.unshift({ crystal, rot, phase });
   }
 
-  #worst(): number {
-    if (this.#kept.length < this.#most) return 0;
-    return this.#kept[this.#kept.length - 1]?.phase.count ?? 0;
+  /** The most pieces so far. */
+  get most(): number {
+    return this.#kept[0]?.phase.count ?? 0;
   }
 
   /** Most pieces first. */
@@ -46,8 +49,18 @@ export class Candidates {
 
   placements({ crystal, rot, phase }: Candidate): NestPlacement[] {
     const turns = crystal.members.map(({ turn }) => fullTurn(rot + turn));
-    const free = turns.map((turn) => this.#room.free(turn));
-    return new PhaseSearch(crystal, free).placements(phase, turns);
+    return new PhaseSearch(crystal, this.#freeFor(crystal, rot)).placements(phase, turns);
+  }
+
+  #freeFor(crystal: Crystal, rot: number) {
+    return crystal.members.map(({ turn }) => this.#room.free(fullTurn(rot + turn)));
+  }
+
+  #canBeCut(crystal: Crystal, rot: number): boolean {
+    const lying = (rings: readonly Ring[]) => rings.map((ring) => turned(ring, rot));
+    const { same, turned: halfTurned } = this.#noFit;
+    const noFit = { same: lying(same), turned: halfTurned && lying(halfTurned) };
+    return deepestConflict(crystal, noFit) < 1e-5;
   }
 }
 

@@ -1,11 +1,4 @@
-import {
-  Clipper,
-  EndType,
-  FillRule,
-  JoinType,
-  type Path64,
-  type Paths64,
-} from 'clipper2-ts';
+import { Clipper, EndType, FillRule, JoinType, type Path64, type Paths64 } from 'clipper2-ts';
 import type { Point } from '../outline/outline.ts';
 import type { Ring } from './problem.ts';
 

@@ -32,5 +32,7 @@ function conflictOf(crystal: Crystal, first: Member, second: Member, noFit: NoFi
 function ringsFor(first: Member, second: Member, noFit: NoFitPair): readonly Ring[] {
   if (first.turn === second.turn) return noFit.same;
   const turned = noFit.turned ?? [];
-  return first.turn === 0 ? turned : turned.map((ring) => ring.map(({ x, y }) => ({ x: -x, y: -y })));
+  return first.turn === 0
+    ? turned
+    : turned.map((ring) => ring.map(({ x, y }) => ({ x: -x, y: -y })));
 }

@@ -7,7 +7,8 @@ import {
   driftShifts,
   rowCurves,
 } from './row-patterns.ts';
-import { clearances, tightened } from './tighten.ts';
+import { clearances } from './crystal-wishes.ts';
+import { tightened } from './tighten.ts';
 import type { Ring } from './problem.ts';
 import { thinnedAround } from './thinned.ts';
 
@@ -23,7 +24,10 @@ const directions = 60;
  * Patterns of little area per piece, densest first: straight and alternating rows in some 60
  * directions, of which the most promising are tightened, first against a simpler outline.
  */
-export function densePatterns(noFit: NoFitPair, effort: { seeds: number; kept: number }): Pattern[] {
+export function densePatterns(
+  noFit: NoFitPair,
+  effort: { seeds: number; kept: number },
+): Pattern[] {
   const coarse: NoFitPair = {
     same: noFit.same.map(coarser),
     turned: noFit.turned && noFit.turned.map(coarser),
@@ -47,7 +51,7 @@ const patternOf = (crystal: Crystal): Pattern => ({ crystal, areaMm2: areaPerPie
 const coarser = (ring: Ring): Ring => thinnedAround(ring, 48);
 
 /** The best straight and the best alternating rows in a direction of the outline's own. */
-function patternsAt(noFit: NoFitPair, directionDeg: number): Pattern[] {
+export function patternsAt(noFit: NoFitPair, directionDeg: number): Pattern[] {
   const frame = rowFrame(noFit, directionDeg);
   const curves = rowCurves(frame, frame.leastPitch);
   const straight = driftShifts(curves, 3).map((shift) => driftingRows(curves, shift));

@@ -56,7 +56,9 @@ export class Edges {
       // On the right-hand side of a counter-clockwise edge it is free.
       if (far < reach) near.push({ at, far, beyond: (x0 * dy - y0 * dx) / -long });
     }
-    return near.sort((a, b) => (Math.abs(a.far - b.far) < 1e-7 ? b.beyond - a.beyond : a.far - b.far));
+    return near.sort((a, b) =>
+      Math.abs(a.far - b.far) < 1e-7 ? b.beyond - a.beyond : a.far - b.far,
+    );
   }
 
   #clipped(at: number, x: number, y: number, reach: number): Point[] {

@@ -75,7 +75,8 @@ function cornersToEdges(corners: Ring, ring: Ring, near: number): number {
 function outsideFaults(problem: NestProblem, rings: readonly Ring[]): Fault[] {
   const { container, holes = [], trim = 0, flawClearance = 0 } = problem;
   const flaws = grown(holes.map(counterClockwise), flawClearance);
-  const edges = container.type === 'polygon' ? grown([counterClockwise(container.points)], -trim) : null;
+  const edges =
+    container.type === 'polygon' ? grown([counterClockwise(container.points)], -trim) : null;
   return rings.flatMap((ring, piece): Fault[] => {
     const outside = edges ? leaves(ring, edges) : leavesBox(ring, problem);
     if (outside) return [{ piece, what: 'outside' }];

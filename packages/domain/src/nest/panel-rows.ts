@@ -9,6 +9,7 @@ import {
   rowCurves,
   zigzagRows,
 } from './row-patterns.ts';
+import { driftingUnits, unitCurve, unitRows, zigzagUnits } from './unit-rows.ts';
 
 /** The room that rows have, by the places of the pieces' origins. */
 export interface RowRoom {
@@ -25,23 +26,33 @@ export interface RowEffort {
 }
 
 /** Patterns whose rows lie along x, with pitches and shifts that suit rows of a given length. */
-export function* rowsFor(
-  frame: RowFrame,
-  room: RowRoom,
-  effort: RowEffort,
-): Generator<Crystal> {
-  for (const pitch of pitchesFor(frame.leastPitch, room.length, effort.pitches, frame)) {
+export function* rowsFor(frame: RowFrame, room: RowRoom, effort: RowEffort): Generator<Crystal> {
+  const turns = frame.turnedOverSame !== null;
+  for (const pitch of pitchesFor(frame.leastPitch, room.length, effort.pitches, turns)) {
     const curves = rowCurves(frame, pitch);
     yield* straight(curves, room, effort);
     yield* alternating(curves, room, effort);
   }
+  yield* pairs(frame, room, effort);
+}
+
+function* pairs(frame: RowFrame, { length }: RowRoom, effort: RowEffort): Generator<Crystal> {
+  for (const row of unitRows(frame, effort.pitches)) {
+    const curve = unitCurve(frame, row, row);
+    const least = curve.minima().slice(0, effort.shifts);
+    const spare = spareOf(length, row.pitch);
+    for (const { shift } of least) yield driftingUnits(row, curve, shift);
+    for (const shift of [0, row.pitch / 2, spare, ...least.map((step) => step.shift)]) {
+      yield zigzagUnits(row, curve, shift);
+    }
+  }
 }
 
 /** The least pitch, and such as leave a row's end no waste or room for half a pitch's shift. */
-function pitchesFor(least: number, length: number, most: number, frame: RowFrame): number[] {
+export function pitchesFor(least: number, length: number, most: number, turns: boolean): number[] {
   if (!(least > 0) || least === Infinity) return [];
   const fits = Math.floor(length / least + 1e-9);
-  const widest = least * (frame.turnedOverSame ? 2.3 : 1.8);
+  const widest = least * (turns ? 2.3 : 1.8);
   const pitches = [least];
   for (let gaps = fits; gaps >= 1 && length / (gaps + 0.75) <= widest; gaps -= 1) {
     for (const spare of [0.5, 0, 0.25, 0.75]) {

@@ -8,6 +8,13 @@ export interface Phase {
   v: number;
 }
 
+/** A piece of a pattern: which member, and how many steps along and across from the origin. */
+export interface Cellmate {
+  member: number;
+  u: number;
+  v: number;
+}
+
 /** A room's edges in steps of the pattern, one list per member: u0, v0, u1, v1. */
 type Edges = Float64Array;
 
@@ -24,14 +31,17 @@ export class PhaseSearch {
     );
   }
 
-  /** The best along every line: exact in one direction, in the other at what is tried. */
-  best(tries: number): Phase {
+  /**
+   * The best along every line: exact in one direction, in the other at what is tried.
+   * @param lines further lines to look along, as shares of a step across
+   */
+  best(tries: number, lines: readonly number[] = []): Phase {
     let best: Phase = { count: 0, u: 0, v: 0 };
     const look = (v: number) => {
       const phase = this.#alongLine(v - Math.floor(v));
       if (phase.count > best.count) best = phase;
     };
-    for (const v of this.#corners()) look(v);
+    for (const v of [...lines, ...this.#corners()]) look(v);
     for (let at = 0; at < tries; at += 1) look((at + 0.5) / tries);
     for (let step = 0.25; tries > 0 && step > 0.05; step /= 2) {
       const { v } = best;
@@ -40,22 +50,29 @@ export class PhaseSearch {
     return best;
   }
 
-  /** The places of all pieces, row by row. */
-  placements({ u, v }: Phase, turns: readonly number[]): NestPlacement[] {
-    const { along, across, members } = this.#crystal;
-    return members.flatMap(({ at }, member) => {
-      const found: NestPlacement[] = [];
-      for (const [line, from, to] of spans(this.#members[member] as Edges, v)) {
-        for (let i = Math.ceil(from - u); i <= to - u; i += 1) {
-          const [a, b] = [u + i, v + line];
-          found.push({
-            x: at.x + a * along.x + b * across.x,
-            y: at.y + a * along.y + b * across.y,
-            rot: turns[member] as number,
-          });
-        }
+  /** The pieces that lie in the room. */
+  mates({ u, v }: Phase): Cellmate[] {
+    return this.#members.flatMap((edges, member) => {
+      const found: Cellmate[] = [];
+      for (const [line, from, to] of spans(edges, v)) {
+        for (let i = Math.ceil(from - u); i <= to - u; i += 1)
+          found.push({ member, u: i, v: line });
       }
       return found;
+    });
+  }
+
+  /** The places of all pieces, row by row. */
+  placements(phase: Phase, turns: readonly number[]): NestPlacement[] {
+    const { along, across, members } = this.#crystal;
+    return this.mates(phase).map((mate) => {
+      const [a, b] = [mate.u + phase.u, mate.v + phase.v];
+      const { x, y } = members[mate.member]?.at ?? { x: 0, y: 0 };
+      return {
+        x: x + a * along.x + b * across.x,
+        y: y + a * along.y + b * across.y,
+        rot: turns[mate.member] ?? 0,
+      };
     });
   }
 
@@ -63,9 +80,10 @@ export class PhaseSearch {
   #corners(): number[] {
     return this.#members.flatMap((edges) => {
       if (edges.length > 4 * 8) return [];
-      return Array.from({ length: edges.length / 4 }, (_, at) => edges[at * 4 + 1] as number).flatMap(
-        (v) => [v + nudge, v - nudge],
-      );
+      return Array.from(
+        { length: edges.length / 4 },
+        (_, at) => edges[at * 4 + 1] as number,
+      ).flatMap((v) => [v + nudge, v - nudge]);
     });
   }
 
@@ -133,24 +151,26 @@ function edgesOf({ along, across }: Crystal, rings: readonly Ring[], x: number, 
 
 /** The stretches of the lines v, v + 1, … that lie in the room: line, from u, to u. */
 function spans(edges: Edges, v: number): [line: number, from: number, to: number][] {
-  const lines = new Map<number, number[]>();
+  const lines: number[][] = [];
+  let first = Infinity;
+  for (let at = 1; at < edges.length; at += 2) first = Math.min(first, edges[at] as number);
+  first = Math.floor(first - v);
   for (let at = 0; at < edges.length; at += 4) {
     const [v0, v1] = [edges[at + 1] as number, edges[at + 3] as number];
     const [low, high] = v0 < v1 ? [v0, v1] : [v1, v0];
     for (let line = Math.ceil(low - v); line + v < high; line += 1) {
       const [u0, u1] = [edges[at] as number, edges[at + 2] as number];
       const u = u0 + ((line + v - v0) / (v1 - v0)) * (u1 - u0);
-      const others = lines.get(line);
-      if (others) others.push(u);
-      else lines.set(line, [u]);
+      (lines[line - first] ??= []).push(u);
     }
   }
   const found: [number, number, number][] = [];
-  for (const [line, us] of lines) {
-    us.sort((a, b) => a - b);
+  lines.forEach((us, line) => {
+    if (us.length > 2) us.sort((a, b) => a - b);
     for (let at = 0; at + 1 < us.length; at += 2) {
-      found.push([line, us[at] as number, us[at + 1] as number]);
+      const [a, b] = [us[at] as number, us[at + 1] as number];
+      found.push([line + first, Math.min(a, b), Math.max(a, b)]);
     }
-  }
+  });
   return found;
 }

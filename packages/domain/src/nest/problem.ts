@@ -59,8 +59,8 @@ export interface RegularPlan {
   placements: NestPlacement[];
   /** null where nothing fits */
   rows: RowNumbers | null;
-  /** share of the plane that the pattern covers, edges apart; 0 where nothing fits */
-  density: number;
+  /** share of the plane that the densest pattern found for this outline covers; 0 if none was sought */
+  planeDensity: number;
   /** strip only */
   period: StripPeriod | null;
   /** strip only: length of strip per piece in the middle of a long strip */

@@ -2,13 +2,7 @@ import type { Point } from '../outline/outline.ts';
 import { grown, unionPositive } from './clip.ts';
 import { convolution } from './convolution.ts';
 import type { NestProblem, Ring } from './problem.ts';
-import {
-  counterClockwise,
-  mirroredThroughOrigin,
-  ringBounds,
-  signedArea,
-  turned,
-} from './ring.ts';
+import { counterClockwise, mirroredThroughOrigin, ringBounds, signedArea, turned } from './ring.ts';
 import type { Shape } from './shape.ts';
 
 /** Where the pieces may lie: the places that a piece's origin may take, by its turn. */

@@ -22,6 +22,8 @@ export interface RowFrame {
   sameOverTurned: Pieces | null;
   /** the least distance that pieces of one row can repeat at */
   leastPitch: number;
+  /** where a half-turned piece may not lie, the rows along x */
+  turnedRings: readonly Ring[] | null;
 }
 
 export function rowFrame(noFit: NoFitPair, directionDeg: number): RowFrame {
@@ -33,6 +35,7 @@ export function rowFrame(noFit: NoFitPair, directionDeg: number): RowFrame {
     turnedOverSame: turned ? topOf(turned) : null,
     sameOverTurned: turned ? topOf(turned.map(mirrored)) : null,
     leastPitch: leastPitch(same),
+    turnedRings: turned ?? null,
   };
 }
 
@@ -58,7 +61,7 @@ function topOf(rings: readonly Ring[]): Pieces {
 
 /** The least pitch of which no multiple lies inside the no-fit polygon, by where y = 0 crosses it. */
 function leastPitch(rings: readonly Ring[]): number {
-  const inside = crossings(rings).filter(([, to]) => to > 1e-9);
+  const inside = crossings(rings, 0).filter(([, to]) => to > 1e-9);
   const free = (pitch: number) =>
     inside.every(([from, to]) => {
       const multiple = Math.max(1, Math.ceil(from / pitch + 1e-9));
@@ -68,13 +71,19 @@ function leastPitch(rings: readonly Ring[]): number {
   return Math.min(...candidates.filter(free));
 }
 
-function crossings(rings: readonly Ring[]): [number, number][] {
+/** From where to where a line along x meets the rings, from the first place to the last. */
+export function chordAt(rings: readonly Ring[], y: number): [left: number, right: number] {
+  const pairs = crossings(rings, y);
+  return [pairs[0]?.[0] ?? 0, pairs[pairs.length - 1]?.[1] ?? 0];
+}
+
+function crossings(rings: readonly Ring[], y: number): [number, number][] {
   const xs: number[] = [];
   for (const ring of rings) {
     let from = ring[ring.length - 1] as Point;
     for (const to of ring) {
-      if (from.y > 0 !== to.y > 0) {
-        xs.push(from.x - (from.y / (to.y - from.y)) * (to.x - from.x));
+      if (from.y > y !== to.y > y) {
+        xs.push(from.x + ((y - from.y) / (to.y - from.y)) * (to.x - from.x));
       }
       from = to;
     }

@@ -34,7 +34,8 @@ export class StepCurve {
       const before = (at === 0 ? pieces[pieces.length - 1] : pieces[at - 1]) as number;
       const next = (at + 5 < pieces.length ? pieces[at + 5] : pieces[1]) as number;
       const x1 = pieces[at + 2] as number;
-      if (y0 <= before + 1e-9 && y0 <= y1 + 1e-9) found.push({ shift: x0, height: Math.max(0, y0) });
+      if (y0 <= before + 1e-9 && y0 <= y1 + 1e-9)
+        found.push({ shift: x0, height: Math.max(0, y0) });
       if (y1 <= next + 1e-9 && y1 <= y0 + 1e-9) found.push({ shift: x1, height: Math.max(0, y1) });
     }
     return distinct(found.sort((a, b) => a.height - b.height || a.shift - b.shift));

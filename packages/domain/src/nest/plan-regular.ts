@@ -1,0 +1,103 @@
+import { checkNestProblem, fitsNowhere } from './check-problem.ts';
+import type { Crystal } from './crystal.ts';
+import { densePatterns, type Pattern } from './dense-patterns.ts';
+import { nestFaults } from './nest-faults.ts';
+import { panelCandidates } from './plan-panel.ts';
+import { sideCandidates } from './plan-side.ts';
+import { bestStripCell, repeated } from './plan-strip.ts';
+import type { NestProblem, RegularPlan, RowNumbers } from './problem.ts';
+import { Room } from './room.ts';
+import { basesOf, type Shape, shapeOf } from './shape.ts';
+import type { StripCell } from './strip-cell.ts';
+
+const nothing: RegularPlan = {
+  placements: [],
+  rows: null,
+  planeDensity: 0,
+  period: null,
+  mmPerPiece: null,
+};
+
+/**
+ * The best layout in rows that a person can repeat by hand: on a panel or a side the most pieces,
+ * of a strip the least length per piece. The same problem always gives the same plan; what does
+ * not fit gives none. Every plan has been looked over by `nestFaults`.
+ * @throws InvalidInput naming what makes no sense · NotWorkable beyond 20,000 pieces
+ */
+export function planRegular(problem: NestProblem): RegularPlan {
+  checkNestProblem(problem);
+  const shape = shapeOf(problem.outline, problem.gap);
+  if (fitsNowhere(problem, shape)) return nothing;
+  const patterns = patternsFor(problem, shape);
+  const planeDensity = densityOf(shape, patterns);
+  if (problem.container.type === 'strip') {
+    return { ...planStrip(problem, shape, patterns), planeDensity };
+  }
+  const room = new Room(problem, shape);
+  const plan =
+    problem.container.type === 'rect' && !problem.holes?.length ? panelCandidates : sideCandidates;
+  const candidates = plan(problem, shape, room, patterns);
+  for (const candidate of candidates.kept) {
+    const placements = candidates.placements(candidate);
+    if (nestFaults(problem, placements).length > 0) continue;
+    return {
+      ...nothing,
+      placements,
+      planeDensity,
+      rows: rowNumbers(candidate.crystal, candidate.rot),
+    };
+  }
+  return { ...nothing, planeDensity };
+}
+
+const effort = { seeds: 24, kept: 8 };
+
+function patternsFor({ rotations }: NestProblem, shape: Shape): Pattern[] {
+  const bases = basesOf(rotations, shape.symmetrical);
+  const halfTurns = bases === null || bases.some((base) => base.halfTurns);
+  return densePatterns(halfTurns ? shape.noFit : { ...shape.noFit, turned: null }, effort);
+}
+
+function planStrip(problem: NestProblem, shape: Shape, patterns: readonly Pattern[]): RegularPlan {
+  const cell = bestStripCell(problem, shape, patterns);
+  if (!cell) return nothing;
+  const { container } = problem;
+  const least = 2 * cell.pieces.length;
+  const asked = container.type === 'strip' ? (container.qty ?? least) : least;
+  const period = { mm: cell.periodMm, pieces: cell.pieces.length };
+  return {
+    placements: repeated(cell, problem, Math.max(asked, least)),
+    rows: stripRows(cell),
+    planeDensity: 0,
+    period,
+    mmPerPiece: period.mm / period.pieces,
+  };
+}
+
+const densityOf = ({ areaMm2 }: Shape, patterns: readonly Pattern[]): number =>
+  patterns[0] ? areaMm2 / patterns[0].areaMm2 : 0;
+
+function stripRows({ periodMm, pieces }: StripCell): RowNumbers {
+  const [first, second] = pieces;
+  return {
+    pitchMm: periodMm,
+    rowStepMm: first && second ? Math.abs(second.y - first.y) : 0,
+    shiftMm: first && second ? second.x - first.x : 0,
+    directionDeg: 0,
+    rowTurns: pieces.map(({ rot }) => rot),
+  };
+}
+
+function rowNumbers({ along, across, members }: Crystal, rot: number): RowNumbers {
+  const pitchMm = Math.hypot(along.x, along.y);
+  const second = members[1]?.at;
+  const cross = (along.x * across.y - along.y * across.x) / pitchMm;
+  const shift = second ?? across;
+  return {
+    pitchMm,
+    rowStepMm: Math.abs(cross) / members.length,
+    shiftMm: (along.x * shift.x + along.y * shift.y) / pitchMm,
+    directionDeg: (Math.atan2(along.y, along.x) * 180) / Math.PI,
+    rowTurns: members.map(({ turn }) => (rot + turn) % 360),
+  };
+}

@@ -1,0 +1,59 @@
+import { Candidates } from './candidates.ts';
+import { areaPerPiece, type Crystal, turnedCrystal } from './crystal.ts';
+import { clearances } from './crystal-wishes.ts';
+import type { Pattern } from './dense-patterns.ts';
+import type { NestProblem } from './problem.ts';
+import type { Room } from './room.ts';
+import { seeded } from './seeded.ts';
+import { type Base, basesOf, type Shape } from './shape.ts';
+import { tightened } from './tighten.ts';
+
+/** Lines of a pattern to look along at first, and for what has given most. */
+const [firstTries, lastTries] = [40, 240];
+const variations = 40;
+/** How strongly variations are pulled away from the densest, in shares of a piece's size. */
+const pulls = [0.03, 0.1, 0.2];
+
+/** Dense patterns over a side or hide, and variations of them, most pieces first. */
+export function sideCandidates(
+  { rotations }: NestProblem,
+  shape: Shape,
+  room: Room,
+  patterns: readonly Pattern[],
+): Candidates {
+  const candidates = new Candidates(room, shape.noFit);
+  const bases = basesOf(rotations, shape.symmetrical) ?? anyAngle();
+  const consider = (crystal: Crystal, { rot, halfTurns }: Base) => {
+    if (crystal.members.length > 1 && !halfTurns) return;
+    candidates.consider(turnedCrystal(crystal, rot), rot, firstTries);
+  };
+  for (const base of bases) for (const { crystal } of patterns) consider(crystal, base);
+  const perBase = Math.ceil(variations / bases.length);
+  for (const base of bases) {
+    const allowed = patterns.filter(
+      ({ crystal }) => base.halfTurns || crystal.members.length === 1,
+    );
+    for (const crystal of varied(shape, allowed, perBase)) consider(crystal, base);
+  }
+  for (const { crystal, rot } of candidates.kept.slice(0, 2)) {
+    candidates.consider(crystal, rot, lastTries);
+  }
+  return candidates;
+}
+
+const anyAngle = (): Base[] =>
+  Array.from({ length: 18 }, (_, at) => ({ rot: at * 10, halfTurns: true }));
+
+/** Other patterns all but as dense: the shape of the side decides which of them gives most. */
+function varied(shape: Shape, patterns: readonly Pattern[], count: number): Crystal[] {
+  const clear = clearances(shape.noFit);
+  const chance = seeded(1);
+  const dense = patterns.filter(({ areaMm2 }) => areaMm2 < 1.04 * (patterns[0]?.areaMm2 ?? 0));
+  if (dense.length === 0) return [];
+  return Array.from({ length: count }, (_, at) => {
+    const { crystal } = dense[at % Math.min(6, dense.length)] as Pattern;
+    const strength = (pulls[at % pulls.length] as number) * Math.sqrt(areaPerPiece(crystal));
+    const pull = [0, 1, 2, 3].map(() => (2 * chance() - 1) * strength);
+    return tightened(crystal, clear, pull);
+  });
+}
