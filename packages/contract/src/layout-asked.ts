@@ -30,7 +30,9 @@ export function layoutSourceOf(asked: LayoutAsked): LayoutSource {
   if (asked.outline === null || asked.container === null) {
     throw new TypeError('A layout by outline without an outline or a container');
   }
-  const input = {
+  const input: LayoutInput = {
+    turns: asked.turns,
+    ...(asked.layoutBy === 'best found' && { search: 'best' }),
     outline: outlineOf(asked.outline),
     container: containerOf(asked.container),
     spacingMm: Number(asked.spacingMm),

@@ -78,12 +78,19 @@ export type TypedHandCount = z.infer<typeof handCount>;
 
 /** The part of a pattern that says how many pieces leather gives. */
 export const layoutFields = {
-  /** Which of the two drives the layout, where both are there. */
-  layoutBy: z.enum(['outline', 'hand count'], 'Choose outline or hand count.'),
+  /** What drives the layout: the outline in rows, the outline as best found anyhow, or a hand count. */
+  layoutBy: z.enum(
+    ['outline', 'best found', 'hand count'],
+    'Choose outline, best found or hand count.',
+  ),
   outline: outline.nullable(),
   handCount: handCount.nullable(),
   /** The panel or strip that the outline is laid on; a hand count brings its own panel. */
   container: container.nullable(),
+  /** How a piece may be turned against the spine, which runs along the panel's width or the strip. */
+  turns: z
+    .enum(['with the spine', 'quarter turns', 'free'], 'Choose how pieces may be turned.')
+    .default('quarter turns'),
   /** The least distance between two cuts. */
   spacingMm: lengthBetween('spacing', 0, 100),
   /** The border of a panel or strip that stays unused. */
@@ -118,24 +125,32 @@ const laidContainer = z.discriminatedUnion('form', [
   z.object({ form: z.literal('strip'), widthMm: mm, lengthMm: mm.optional() }),
 ]);
 
-/** How the pieces lie, as the domain works it out; geometry is in numbers, areas are exact text. */
+/** How pieces lie on whatever they are cut from; geometry is in numbers, areas are exact text. */
+export const lie = {
+  by: z.enum(['rows', 'best found', 'hand count']),
+  pieces: z.int().min(0),
+  placements: z.array(z.object({ x: mm, y: mm, rot: mm })),
+  pitchMm: mm.nullable(),
+  rowStepMm: mm.nullable(),
+  shiftMm: mm.nullable(),
+  rows: z.int().nullable(),
+  piecesPerRow: z.int().nullable(),
+  turned: z.enum(['none', 'every other row', 'every other piece']),
+  containerAreaMm2: z.string(),
+  pieceAreaMm2: z.string().nullable(),
+  yieldPercent: z.string().nullable(),
+  areaPerPieceMm2: z.string().nullable(),
+  wasteBetweenPercent: z.string().nullable(),
+  edgeWastePercent: z.string().nullable(),
+  boundPieces: z.int().nullable(),
+  piecesInRows: z.int().nullable(),
+};
+
+/** How the pieces lie on a panel or strip, as the domain works it out. */
 export const layout = z
   .object({
-    by: z.enum(['rows', 'hand count']),
-    pieces: z.int().min(0),
-    placements: z.array(z.object({ x: mm, y: mm, rot: mm })),
-    pitchMm: mm.nullable(),
-    rowStepMm: mm.nullable(),
-    shiftMm: mm.nullable(),
-    rows: z.int().nullable(),
-    piecesPerRow: z.int().nullable(),
-    turned: z.enum(['none', 'every other row', 'every other piece']),
+    ...lie,
     container: laidContainer,
-    containerAreaMm2: z.string(),
-    pieceAreaMm2: z.string().nullable(),
-    yieldPercent: z.string().nullable(),
-    areaPerPieceMm2: z.string().nullable(),
-    boundPieces: z.int().nullable(),
     mmPerPiece: mm.nullable(),
     period: z.object({ mm, pieces: z.int() }).nullable(),
   })

@@ -31,7 +31,8 @@ export { readDrawing } from './outline/read-drawing.ts';
 export { holesWithin, outlineFromDrawing } from './outline/outline-from-drawing.ts';
 
 export type * from './yield/layout.ts';
-export { layOut } from './yield/lay-out.ts';
+export { layOut, layOutSide } from './yield/lay-out.ts';
+export type { Watch } from './yield/lie.ts';
 export { handCount } from './yield/hand-count.ts';
 export { layoutInputKey } from './yield/layout-input-key.ts';
 

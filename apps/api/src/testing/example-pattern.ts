@@ -10,6 +10,7 @@ export function coaster(
     outline: { shape: 'round', diameterMm: '95' },
     handCount: null,
     container: { form: 'panel', widthMm: '279.4', heightMm: '330.2' },
+    turns: 'quarter turns',
     spacingMm: '2',
     trimMm: '3',
     leatherId,

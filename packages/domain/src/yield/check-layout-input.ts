@@ -1,8 +1,7 @@
-import { InvalidInput, NotWorkable } from '../errors/domain-error.ts';
+import { InvalidInput } from '../errors/domain-error.ts';
+import { type DrawnSide, soundSide } from '../leather/drawn-side.ts';
 import { checkOutline } from '../outline/check-outline.ts';
-import type { Container, LayoutInput } from './layout.ts';
-
-const mostPieces = 20_000;
+import type { Container, LayoutInput, LayRules, SideInput } from './layout.ts';
 
 /**
  * Refuses a layout that cannot be drawn: spacing and trim from 0 to 100 mm, container sides from 1
@@ -10,10 +9,20 @@ const mostPieces = 20_000;
  * @throws InvalidInput
  */
 export function checkLayoutInput(input: LayoutInput): void {
-  checkOutline(input.outline);
-  checkSide(input.spacingMm, 'spacingMm', 'spacing', 0, 100);
-  checkSide(input.trimMm, 'trimMm', 'trim', 0, 100);
+  checkRules(input);
   checkContainer(input.container);
+}
+
+/** The same for a side, which comes back in whole micrometres. @throws InvalidInput */
+export function checkSideInput(input: SideInput): DrawnSide {
+  checkRules(input);
+  return soundSide(input.side);
+}
+
+function checkRules({ outline, spacingMm, trimMm }: LayRules): void {
+  checkOutline(outline);
+  checkSide(spacingMm, 'spacingMm', 'spacing', 0, 100);
+  checkSide(trimMm, 'trimMm', 'trim', 0, 100);
 }
 
 export function checkContainer(container: Container): void {
@@ -29,14 +38,5 @@ export function checkContainer(container: Container): void {
 function checkSide(value: number, field: string, word: string, min: number, max: number): void {
   if (!(value >= min && value <= max)) {
     throw new InvalidInput(field, `Write the ${word} as ${min} to ${max} mm.`);
-  }
-}
-
-/** @throws NotWorkable where the picture alone would be too large */
-export function checkPieceCount(bound: number): void {
-  if (bound > mostPieces) {
-    throw new NotWorkable(
-      `More than ${mostPieces} pieces could lie there: work out a smaller panel and take several.`,
-    );
   }
 }

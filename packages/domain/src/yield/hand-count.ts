@@ -34,7 +34,10 @@ export function handCount({
     pieceAreaMm2: null,
     yieldPercent: null,
     areaPerPieceMm2: toAtMost(area.div(pieces), 3),
+    wasteBetweenPercent: null,
+    edgeWastePercent: null,
     boundPieces: null,
+    piecesInRows: null,
     mmPerPiece: null,
     period: null,
   };

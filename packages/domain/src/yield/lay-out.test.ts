@@ -171,3 +171,15 @@ describe('a layout on a strip', { timeout: 300_000 }, () => {
     expect(layout).toMatchObject({ pieces: 0, mmPerPiece: null, period: null });
   });
 });
+
+it('says where the leather goes: the pieces, the waste between them, and the edges', () => {
+  const outline: Outline = { shape: 'round', diameterMm: 50 };
+  const layout = layOut({ outline, spacingMm: 0, trimMm: 0, container: panel(1000, 1000) });
+  // No pattern of equal discs wastes less between them than 1 − π/√12 (Thue 1910, from memory);
+  // rows are spread over the panel where that costs no piece.
+  expect(Number(layout.wasteBetweenPercent)).toBeGreaterThanOrEqual(9.31);
+  expect(Number(layout.wasteBetweenPercent)).toBeLessThan(14);
+  const [between, edge] = [layout.wasteBetweenPercent, layout.edgeWastePercent].map(Number);
+  const cells = 100 - (edge ?? 0);
+  expect(Number(layout.yieldPercent)).toBeCloseTo(cells * (1 - (between ?? 0) / 100), 1);
+});

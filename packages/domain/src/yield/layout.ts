@@ -1,18 +1,37 @@
 import type { DecimalText } from '../numbers/decimal-text.ts';
+import type { DrawnSide } from '../leather/drawn-side.ts';
 import type { Outline } from '../outline/outline.ts';
 
-/** What is cut from: a panel, or a strip, which has no end unless a length is given. In mm. */
+/** What is cut from, in mm: a panel, or a strip, which has no end unless a length is given. */
 export type Container =
   | { form: 'panel'; widthMm: number; heightMm: number }
   | { form: 'strip'; widthMm: number; lengthMm?: number };
 
-export interface LayoutInput {
+/** How a piece may be turned against the spine, which runs along x. */
+export type Turns = 'with the spine' | 'quarter turns' | 'free';
+
+/** Rows that a person repeats by hand, or the most pieces found anyhow. */
+export type Search = 'rows' | 'best';
+
+/** How pieces may lie, whatever they are cut from. */
+export interface LayRules {
   outline: Outline;
   /** least distance between two cuts, 0 to 100 mm */
   spacingMm: number;
-  /** unusable border on every side of a panel, on both sides (and ends) of a strip, in mm */
+  /** unusable border along every edge and around every flaw, in mm; an endless strip has no ends */
   trimMm: number;
+  /** quarter turns where not said */
+  turns?: Turns;
+  /** rows where not said; an endless strip is always laid in rows */
+  search?: Search;
+}
+
+export interface LayoutInput extends LayRules {
   container: Container;
+}
+
+export interface SideInput extends LayRules {
+  side: DrawnSide;
 }
 
 /** Turn the outline's polygon `rot` degrees counter-clockwise about the origin, then shift it. */
@@ -25,34 +44,50 @@ export interface Placement {
 export type Turned = 'none' | 'every other row' | 'every other piece';
 
 /**
- * How copies of an outline lie. A panel is [0, width] × [0, height]; a strip lies along x with y
- * from 0 to its width. For a strip without a length, `pieces`, `placements` and the areas are those
- * of one period, after which the arrangement repeats. What a hand count does not know is null.
+ * How copies of an outline lie, in cutting order. A panel is [0, width] × [0, height]; a strip lies
+ * along x with y from 0 to its width. For a strip without a length, `pieces`, `placements` and the
+ * areas are those of one period, after which the arrangement repeats. What a hand count does not
+ * know is null.
  */
-export interface Layout {
-  by: 'rows' | 'hand count';
+export interface Layout extends Lie {
+  container: Container;
+  /** strip only: length of strip that each piece takes, in the middle of a long strip */
+  mmPerPiece: number | null;
+  /** strip only: the arrangement repeats after so many mm, with so many pieces */
+  period: { mm: number; pieces: number } | null;
+}
+
+/** A layout on a side, which lies as it was drawn. */
+export interface SideLayout extends Lie {
+  side: DrawnSide;
+}
+
+/** How pieces lie, in cutting order, and where the leather goes. */
+export interface Lie {
+  by: 'rows' | 'best found' | 'hand count';
   pieces: number;
   placements: Placement[];
-  /** from one piece of a row to the next (on average, where every other piece is turned) */
+  /** from one piece of a row to the next */
   pitchMm: number | null;
   /** from one row to the next (on average, where the steps differ) */
   rowStepMm: number | null;
-  /** by how much every other row is shifted along itself */
+  /** by how much a row is shifted along itself against the one before */
   shiftMm: number | null;
   rows: number | null;
   piecesPerRow: number | null;
   turned: Turned;
-  container: Container;
   containerAreaMm2: DecimalText;
   pieceAreaMm2: DecimalText | null;
   /** area of the pieces as a per cent of the container's */
   yieldPercent: DecimalText | null;
   /** area of leather that each piece takes, waste included; null where nothing fits */
   areaPerPieceMm2: DecimalText | null;
+  /** waste between pieces: the pattern's cell less the piece, as a per cent of the cell */
+  wasteBetweenPercent: DecimalText | null;
+  /** waste along the edges and flaws: what no cell covers, as a per cent of the container */
+  edgeWastePercent: DecimalText | null;
   /** no layout of any kind gives more than this */
   boundPieces: number | null;
-  /** strip only: length of strip that each piece takes, in the middle of a long strip */
-  mmPerPiece: number | null;
-  /** strip only: the arrangement repeats after so many mm, with so many pieces */
-  period: { mm: number; pieces: number } | null;
+  /** what rows would give, where more was found another way */
+  piecesInRows: number | null;
 }

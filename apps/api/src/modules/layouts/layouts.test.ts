@@ -8,6 +8,7 @@ const round: LayoutAsked = {
   outline: { shape: 'round', diameterMm: '100' },
   handCount: null,
   container: { form: 'panel', widthMm: '300', heightMm: '200' },
+  turns: 'quarter turns',
   spacingMm: '0',
   trimMm: '0',
 };

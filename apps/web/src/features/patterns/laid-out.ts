@@ -1,13 +1,24 @@
 import type { LayoutSource } from '@hidewright/contract';
-import { DomainError, handCount, layOut, type Layout } from '@hidewright/domain';
+import { DomainError, handCount, layOut, type Layout, type Watch } from '@hidewright/domain';
 
 /** A layout, or the sentence that says why there is none. */
 export type LaidOut = { layout: Layout } | { refusal: string };
 
+/** How far a search has come: a share from 0 to 1, and the pieces found so far. */
+export interface Searching {
+  done: number;
+  pieces: number;
+}
+
+/** What the worker says: how far it is, and in the end the answer. */
+export type LayoutNews = { searching: Searching } | { answer: LaidOut };
+
 /** The same working out as on the server. */
-export function laidOut(source: LayoutSource): LaidOut {
+export function laidOut(source: LayoutSource, watch: Watch = {}): LaidOut {
   try {
-    return { layout: source.by === 'outline' ? layOut(source.input) : handCount(source.counted) };
+    const layout =
+      source.by === 'outline' ? layOut(source.input, watch) : handCount(source.counted);
+    return { layout };
   } catch (error) {
     if (error instanceof DomainError) return { refusal: error.message };
     throw error;

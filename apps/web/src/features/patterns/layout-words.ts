@@ -19,7 +19,11 @@ export function piecesWords(pieces: number, form: 'panel' | 'strip'): string {
 /** How the pieces lie, in a few words. */
 export function layoutSubtitle(layout: LayoutReply): string {
   if (layout.pieces === 0) return `nothing from a ${layout.container.form}`;
-  const how = layout.by === 'hand count' ? 'counted by hand' : turnedWords[layout.turned];
+  const how = {
+    rows: turnedWords[layout.turned],
+    'best found': 'as many as could be found',
+    'hand count': 'counted by hand',
+  }[layout.by];
   return `${piecesWords(layout.pieces, layout.container.form)}, ${how}`;
 }
 
@@ -43,6 +47,18 @@ export function layoutFigures(layout: LayoutReply, { areaUnit, lengthUnit }: Uni
       note:
         layout.boundPieces !== null && `no layout gives more than ${countText(layout.boundPieces)}`,
     },
+    layout.piecesInRows !== null && {
+      word: 'rows would give',
+      figure: countText(layout.piecesInRows),
+      note: `${countText(layout.pieces - layout.piecesInRows)} fewer`,
+    },
+    layout.wasteBetweenPercent !== null && {
+      word: 'waste between pieces',
+      figure: percentText(layout.wasteBetweenPercent),
+      note:
+        layout.edgeWastePercent !== null &&
+        `and ${percentText(layout.edgeWastePercent)} along the edges`,
+    },
     layout.areaPerPieceMm2 !== null && {
       word: 'leather for each piece',
       figure: areaText(layout.areaPerPieceMm2, areaUnit, 4),
@@ -52,11 +68,20 @@ export function layoutFigures(layout: LayoutReply, { areaUnit, lengthUnit }: Uni
       layout.rowStepMm !== null && {
         word: 'pitch · row step',
         figure: `${mm(layout.pitchMm)} · ${mm(layout.rowStepMm)}`,
+        note:
+          layout.shiftMm !== null &&
+          layout.shiftMm > 0 &&
+          `each row shifted by ${mm(layout.shiftMm)}`,
       },
     layout.mmPerPiece !== null && {
       word: 'strip for each piece',
       figure: mm(layout.mmPerPiece),
       note: 'in the middle of a long strip',
+    },
+    layout.period !== null && {
+      word: 'pull the strip',
+      figure: mm(layout.period.mm),
+      note: `for every ${countText(layout.period.pieces)}`,
     },
   ];
   return figures.filter((figure) => figure !== false);

@@ -1,8 +1,13 @@
 import '../../lib/zod-without-eval.ts';
 import type { LayoutSource } from '@hidewright/contract';
-import { laidOut } from './laid-out.ts';
+import { laidOut, type LayoutNews } from './laid-out.ts';
 
-/** A tag takes up to a second: worked out beside the page, so that typing never waits for it. */
+const tell = (news: LayoutNews) => self.postMessage(news);
+
+/** A search takes seconds: worked out beside the page, so that typing never waits for it. */
 self.addEventListener('message', ({ data }: MessageEvent<LayoutSource>) => {
-  self.postMessage(laidOut(data));
+  const answer = laidOut(data, {
+    onProgress: (done, pieces) => tell({ searching: { done, pieces } }),
+  });
+  tell({ answer });
 });

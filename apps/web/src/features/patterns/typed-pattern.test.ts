@@ -16,6 +16,7 @@ const tag: PatternDefinition = {
   },
   handCount: null,
   container: { form: 'strip', widthMm: '130', lengthMm: '1200' },
+  turns: 'with the spine',
   spacingMm: '2',
   trimMm: '3',
   leatherId: 1,

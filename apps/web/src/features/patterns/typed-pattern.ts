@@ -48,6 +48,7 @@ const blankDefinition = {
   },
   handCount: { pieces: '', widthMm: '', heightMm: '' },
   container: { form: 'panel', widthMm: '', heightMm: '', lengthMm: '' },
+  turns: 'quarter turns',
   spacingMm: '',
   trimMm: '',
   leatherId: '',
@@ -94,6 +95,7 @@ export function layoutBody(definition: Typed): Typed {
     outline: drawn ? chosen(definition['outline'], 'shape', outlineMeasures) : null,
     handCount: byHand ? definition['handCount'] : null,
     container: byHand ? null : chosen(definition['container'], 'form', containerMeasures),
+    turns: definition['turns'],
     spacingMm: definition['spacingMm'],
     trimMm: definition['trimMm'],
   };

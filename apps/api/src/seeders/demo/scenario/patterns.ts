@@ -14,7 +14,7 @@ interface DemoPattern {
 
 /** An 11 × 13 in panel, which the shop's casing tray takes. */
 const panel = { form: 'panel', widthMm: '279.4', heightMm: '330.2' } as const;
-const spaced = { spacingMm: '2', trimMm: '3' };
+const spaced = { spacingMm: '2', trimMm: '3', turns: 'quarter turns' } as const;
 
 const step = (
   name: string,
@@ -142,6 +142,7 @@ export const patterns = [
       outline: { shape: 'rectangle', widthMm: '240', heightMm: '190', cornerRadiusMm: '10' },
       handCount: null,
       container: { form: 'panel', widthMm: '508', heightMm: '609.6' },
+      turns: 'quarter turns',
       spacingMm: '3',
       trimMm: '4',
       leather: 'Oak tan natural 7–8 oz',

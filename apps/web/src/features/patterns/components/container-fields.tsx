@@ -1,5 +1,6 @@
 import { LengthField } from '../../../components/length-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
+import { SelectField } from '../../../components/select-field.tsx';
 import { useFreshErrors } from '../use-fresh-errors.ts';
 import { FieldRow } from './field-row.tsx';
 
@@ -43,5 +44,23 @@ export function ClearanceFields() {
       />
       <LengthField name="definition.trimMm" label="Trim" help="unused border" whenEmpty="text" />
     </FieldRow>
+  );
+}
+
+const turns = [
+  { value: 'quarter turns', label: 'along or across the spine' },
+  { value: 'with the spine', label: 'along the spine only' },
+  { value: 'free', label: 'any way at all' },
+];
+
+/** How a piece may be turned against the spine. */
+export function TurnsField() {
+  return (
+    <SelectField
+      name="definition.turns"
+      label="Pieces may lie"
+      help="end for end they always may; leather stretches least along the spine"
+      choices={turns}
+    />
   );
 }

@@ -23,7 +23,7 @@ export function LayoutDrawing({ layout, outlinePath, name }: LayoutDrawingProps)
   return (
     <div className="space-y-4">
       {layout.pieces === 0 && <NothingFits form={container.form} />}
-      {layout.by === 'rows' && outlinePath !== null && (
+      {layout.by !== 'hand count' && outlinePath !== null && (
         <LayoutPicture
           title={name === '' ? 'Layout' : `Layout of ${name}`}
           outlinePath={outlinePath}

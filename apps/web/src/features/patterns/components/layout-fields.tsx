@@ -3,12 +3,13 @@ import { Checkbox } from '../../../components/checkbox.tsx';
 import { LengthField } from '../../../components/length-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
-import { ClearanceFields, ContainerFields } from './container-fields.tsx';
+import { ClearanceFields, ContainerFields, TurnsField } from './container-fields.tsx';
 import { FieldRow } from './field-row.tsx';
 import { OutlineFields } from './outline-fields.tsx';
 
 const ways = [
-  { value: 'outline', label: 'From its outline', detail: 'laid out and drawn to scale' },
+  { value: 'outline', label: 'In rows', detail: 'which a hand repeats with the die' },
+  { value: 'best found', label: 'As many as can be found', detail: 'searched for; takes a while' },
   { value: 'hand count', label: 'By hand count', detail: '“I get 21 from 11 × 13 in”' },
 ];
 
@@ -17,13 +18,14 @@ export function LayoutFields() {
   const byHand = useWatch({ name: 'definition.layoutBy' }) === 'hand count';
   return (
     <>
-      <RadioCards name="definition.layoutBy" label="Pieces from the leather" cards={ways} across />
+      <RadioCards name="definition.layoutBy" label="Pieces from the leather" cards={ways} />
       {byHand ? (
         <HandCountFields />
       ) : (
         <>
           <OutlineFields />
           <ContainerFields />
+          <TurnsField />
           <ClearanceFields />
         </>
       )}

@@ -6,7 +6,7 @@ import {
   type LayoutSource,
 } from '@hidewright/contract';
 import { outlinePath } from '@hidewright/domain';
-import { useWatch } from 'react-hook-form';
+import { useFormContext, useWatch } from 'react-hook-form';
 import { Card } from '../../../components/card.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { OutlinePicture } from '../../../components/outline-picture.tsx';
@@ -14,6 +14,7 @@ import { layoutSubtitle } from '../layout-words.ts';
 import { layoutBody } from '../typed-pattern.ts';
 import { useLayoutPreview } from '../use-layout-preview.ts';
 import { LayoutDrawing } from './layout-drawing.tsx';
+import { SearchProgress } from './search-progress.tsx';
 
 /** The outline and its layout, drawn while they are typed. */
 export function LayoutPreview() {
@@ -22,13 +23,20 @@ export function LayoutPreview() {
   const asked = layoutBody(definition);
   const path = pathOf(asked['outline']);
   const source = sourceOf(asked);
-  const { answer, working } = useLayoutPreview(source);
+  const { answer, working, searching } = useLayoutPreview(source);
+  const { setValue } = useFormContext();
   const layout = answer !== undefined && 'layout' in answer ? answer.layout : undefined;
   return (
     <Card title="Layout" subtitle={layout ? layoutSubtitle(layout) : undefined}>
       <div aria-busy={working} className="space-y-5">
         {path !== null && (
           <OutlinePicture outlinePath={path} title="The outline" className="mx-auto max-w-48" />
+        )}
+        {searching && (
+          <SearchProgress
+            searching={searching}
+            onStop={() => setValue('definition.layoutBy', 'outline', { shouldDirty: true })}
+          />
         )}
         {answer !== undefined && 'refusal' in answer && (
           <Notice tone="attention">{answer.refusal}</Notice>

@@ -87,5 +87,10 @@ const turns = {
 };
 
 function inWords({ pieces, container, by, turned }: Layout): string {
-  return `${countText(pieces)} from a ${container.form}${by === 'hand count' ? ', counted by hand' : turns[turned]}`;
+  const how = {
+    rows: turns[turned],
+    'best found': ', as many as could be found',
+    'hand count': ', counted by hand',
+  }[by];
+  return `${countText(pieces)} from a ${container.form}${how}`;
 }

@@ -1,0 +1,51 @@
+import type { Decimal } from 'decimal.js';
+import { nestBounds } from '../nest/bounds.ts';
+import { findBest } from '../nest/find-best.ts';
+import { planRegular } from '../nest/plan-regular.ts';
+import type { NestPlacement, NestProblem, RegularPlan } from '../nest/problem.ts';
+import { outlineArea } from '../outline/measure.ts';
+import { arrangement, inCuttingOrder } from './arrangement.ts';
+import type { LayRules, Lie } from './layout.ts';
+import { sharesOf } from './shares.ts';
+
+/** Told now and then while the best is looked for, so that a person can watch and stop it. */
+export interface Watch {
+  onProgress?: (done: number, pieces: number) => void;
+  shouldStop?: () => boolean;
+}
+
+interface Found {
+  rows: RegularPlan;
+  placements: readonly NestPlacement[];
+  /** not in rows */
+  anyhow: boolean;
+}
+
+/** Lays out in rows, and anyhow where that is asked for and gives more. */
+export function layIn(rules: LayRules, area: Decimal, problem: NestProblem, watch: Watch): Lie {
+  const rows = planRegular(problem);
+  const best = rules.search === 'best' ? findBest(problem, { seedPlan: rows, ...watch }) : [];
+  const anyhow = best.length > rows.placements.length;
+  const placements = anyhow ? best : rows.placements;
+  return lieOf(rules, area, { rows, placements, anyhow }, nestBounds(problem).pieces);
+}
+
+export function lieOf(
+  { outline }: Pick<LayRules, 'outline'>,
+  area: Decimal,
+  { rows, placements, anyhow }: Found,
+  boundPieces: number | null,
+): Lie {
+  const numbers = anyhow ? null : rows.rows;
+  const ordered = inCuttingOrder(placements, numbers?.directionDeg ?? 0);
+  const cellMm2 = numbers && numbers.pitchMm * numbers.rowStepMm;
+  return {
+    by: anyhow ? 'best found' : 'rows',
+    pieces: ordered.length,
+    placements: ordered,
+    ...arrangement(numbers, ordered),
+    ...sharesOf(area, outlineArea(outline), ordered.length, cellMm2),
+    boundPieces,
+    piecesInRows: anyhow ? rows.placements.length : null,
+  };
+}
