@@ -1,6 +1,7 @@
 import * as activity from './activity.ts';
 import * as benchHours from './bench-hours.ts';
 import * as customers from './customers.ts';
+import * as cutAdvice from './cut-advice.ts';
 import type { Endpoint } from './endpoint.ts';
 import * as hardware from './hardware.ts';
 import * as invoices from './invoices.ts';
@@ -39,6 +40,7 @@ const rooms: Record<string, unknown>[] = [
   links,
   orders,
   patterns,
+  cutAdvice,
   layouts,
   tools,
   presses,

@@ -2,6 +2,7 @@ export * from './activity.ts';
 export * from './bench-hours.ts';
 export * from './confidential.ts';
 export * from './customers.ts';
+export * from './cut-advice.ts';
 export * from './endpoint.ts';
 export * from './endpoints.ts';
 export * from './fields.ts';

@@ -2,7 +2,18 @@ import { DomainError, InvalidInput, sideLimits, soundSide } from '@hidewright/do
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { id, idParams, line, optionalLine, page, pageQuery, percent, version } from './fields.ts';
+import {
+  choice,
+  id,
+  idParams,
+  line,
+  optionalLine,
+  page,
+  pageQuery,
+  percent,
+  version,
+} from './fields.ts';
+import { lie } from './layouts.ts';
 
 /** The forms that leather comes in and becomes. */
 export const lotForms = [
@@ -148,4 +159,32 @@ export const drawLot = endpoint({
     }
   }),
   reply: lotDrawing,
+});
+
+/** How a pattern's pieces lie on a lot as it is drawn. */
+const lotLayout = z
+  .object({
+    ...lie,
+    lotId: id,
+    tag: z.string(),
+    patternId: id,
+    patternName: z.string(),
+    outlinePath: z.string(),
+    side: z.object({ outline: z.array(point), flaws: z.array(z.array(point)) }),
+  })
+  .meta({ id: 'LotLayout' });
+export type LotLayout = z.infer<typeof lotLayout>;
+
+export const layOnLot = endpoint({
+  method: 'POST',
+  path: '/lots/{id}/layouts',
+  summary: 'Work out how many pieces of a pattern a drawn lot gives',
+  access: ['owner', 'maker'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    patternId: choice('Choose a pattern.'),
+    search: z.enum(['rows', 'best'], 'Choose rows or best.').default('rows'),
+  }),
+  reply: lotLayout,
 });

@@ -32,6 +32,10 @@ export { holesWithin, outlineFromDrawing } from './outline/outline-from-drawing.
 
 export type * from './yield/layout.ts';
 export { layOut, layOutSide } from './yield/lay-out.ts';
+export { adviseCut, adviseLots } from './yield/advise.ts';
+export type { CutAdvice, CutSource, RackLot } from './yield/advise.ts';
+export { largestOffcut } from './yield/offcut.ts';
+export { placedRing } from './yield/placed-ring.ts';
 export type { Watch } from './yield/lie.ts';
 export { handCount } from './yield/hand-count.ts';
 export { layoutInputKey } from './yield/layout-input-key.ts';

@@ -6,6 +6,11 @@ export async function layOut(input) {
   return work(input);
 }
 
+export async function layOutSide(input) {
+  const { layOutSide: work } = await tsImport('./layout.ts', import.meta.url);
+  return work(input);
+}
+
 export async function salesSheet(request) {
   const { salesSheet: work } = await tsImport('./sheet.ts', import.meta.url);
   return work(request);

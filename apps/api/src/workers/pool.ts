@@ -1,6 +1,12 @@
 import os from 'node:os';
 import { Piscina } from 'piscina';
-import { NotWorkable, type Layout, type LayoutInput } from '@hidewright/domain';
+import {
+  NotWorkable,
+  type Layout,
+  type LayoutInput,
+  type SideInput,
+  type SideLayout,
+} from '@hidewright/domain';
 import { databaseFile, type Config } from '../config.ts';
 import type { LayoutAnswer } from './layout.ts';
 import type { SheetRequest } from './sheet.ts';
@@ -9,6 +15,8 @@ import type { SheetRequest } from './sheet.ts';
 export interface Workers {
   /** @throws {NotWorkable} when the input cannot be laid out */
   layOut(input: LayoutInput): Promise<Layout>;
+  /** The same on a drawn side. @throws {NotWorkable} */
+  layOutSide(input: SideInput): Promise<SideLayout>;
   /** The bytes of the sales sheet of a period. */
   salesSheet(period: Omit<SheetRequest, 'database'>): Promise<Uint8Array>;
   close(): Promise<void>;
@@ -25,14 +33,17 @@ export function startWorkers(config: Config): Workers {
   });
   const database = databaseFile(config.dataDir);
   return {
-    layOut: async (input) => layoutOf((await pool.run(input, { name: 'layOut' })) as LayoutAnswer),
+    layOut: async (input) => layoutOf<Layout>(await pool.run(input, { name: 'layOut' })),
+    layOutSide: async (input) =>
+      layoutOf<SideLayout>(await pool.run(input, { name: 'layOutSide' })),
     salesSheet: (period) =>
       pool.run({ ...period, database }, { name: 'salesSheet' }) as Promise<Uint8Array>,
     close: () => pool.close(),
   };
 }
 
-function layoutOf(answer: LayoutAnswer): Layout {
+function layoutOf<Laid>(given: unknown): Laid {
+  const answer = given as LayoutAnswer<Laid>;
   if ('refusal' in answer) throw new NotWorkable(answer.refusal);
   return answer.layout;
 }

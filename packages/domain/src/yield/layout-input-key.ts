@@ -1,10 +1,10 @@
-import type { LayoutInput } from './layout.ts';
+import type { LayoutInput, SideInput } from './layout.ts';
 
 /** Raised whenever the same input may give another layout, so that stored ones are worked out anew. */
 const engine = 2;
 
 /** The same text for the same input, whatever the order of its fields: to be hashed as a key. */
-export function layoutInputKey(input: LayoutInput): string {
+export function layoutInputKey(input: LayoutInput | SideInput): string {
   return JSON.stringify([engine, sorted(input)]);
 }
 

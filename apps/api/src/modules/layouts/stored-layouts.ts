@@ -1,5 +1,12 @@
 import { createHash } from 'node:crypto';
-import { handCount, layoutInputKey, outlinePath, type Layout } from '@hidewright/domain';
+import {
+  handCount,
+  layoutInputKey,
+  outlinePath,
+  type Layout,
+  type SideInput,
+  type SideLayout,
+} from '@hidewright/domain';
 import {
   layoutSourceOf,
   outlineOf,
@@ -13,11 +20,12 @@ import type { Work } from '../../work.ts';
 import { StoredLayout } from './layout.entity.ts';
 
 /** A layout that is known but perhaps not kept yet. */
-export interface WorkedLayout {
+export interface Worked<Source, Laid> {
   inputHash: string;
-  source: LayoutSource;
-  layout: Layout;
+  source: Source;
+  layout: Laid;
 }
+export type WorkedLayout = Worked<LayoutSource, Layout>;
 
 /** Finds a layout by what goes into it. */
 export function layoutHash(asked: LayoutAsked): string {
@@ -33,20 +41,37 @@ export async function layoutFor(
   asked: LayoutAsked,
 ): Promise<WorkedLayout> {
   const source = layoutSourceOf(asked);
-  const inputHash = hashOf(source);
-  const stored = await context.orm.em.fork().findOne(StoredLayout, { inputHash });
-  if (stored !== null) return { inputHash, source, layout: stored.result as Layout };
-  const layout =
+  return workedOnce(context, source, hashOf(source), async () =>
     source.by === 'outline'
       ? await context.workers.layOut(source.input)
-      : handCount(source.counted);
+      : handCount(source.counted),
+  );
+}
+
+/** The layout of pieces on a drawn side, found or worked out in the same way. */
+export async function sideLayoutFor(
+  context: Pick<Context, 'orm' | 'workers'>,
+  input: SideInput,
+): Promise<Worked<SideInput, SideLayout>> {
+  const inputHash = sha256(layoutInputKey(input));
+  return workedOnce(context, input, inputHash, () => context.workers.layOutSide(input));
+}
+
+async function workedOnce<Source, Laid>(
+  { orm }: Pick<Context, 'orm'>,
+  source: Source,
+  inputHash: string,
+  workOut: () => Promise<Laid>,
+): Promise<Worked<Source, Laid>> {
+  const stored = await orm.em.fork().findOne(StoredLayout, { inputHash });
+  const layout = stored === null ? await workOut() : (stored.result as Laid);
   return { inputHash, source, layout };
 }
 
 /** Stores a layout once, in the transaction that uses it; the same input finds the same row. */
 export async function keepLayout(
   work: Pick<Work, 'em' | 'now'>,
-  worked: WorkedLayout,
+  worked: Worked<unknown, { pieces: number }>,
 ): Promise<StoredLayout> {
   const { inputHash, source, layout } = worked;
   const stored = await work.em.findOne(StoredLayout, { inputHash });
@@ -97,5 +122,7 @@ function hashOf(source: LayoutSource): string {
     source.by === 'outline'
       ? layoutInputKey(source.input)
       : `hand count ${JSON.stringify(source.counted)}`;
-  return createHash('sha256').update(key).digest('hex');
+  return sha256(key);
 }
+
+const sha256 = (key: string) => createHash('sha256').update(key).digest('hex');

@@ -4,12 +4,15 @@ import { Decimal } from 'decimal.js';
 import {
   changeLot,
   drawLot,
+  layOnLot as layOnLotEndpoint,
   listLots,
   readLot,
   readLotDrawing,
   type LotDrawing,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { layOnLot, laidOnLotReply, type LaidOnLot } from '../../flows/lay-on-lot.ts';
+import { keepLayout } from '../layouts/stored-layouts.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
@@ -65,6 +68,17 @@ export function lotRoutes(context: Context): Router {
     });
     return drawingOf(lot);
   });
+
+  serve(
+    router,
+    context,
+    layOnLotEndpoint,
+    async (work, _asked, laid: LaidOnLot) => {
+      await keepLayout(work, laid.worked);
+      return laidOnLotReply(laid);
+    },
+    ({ params, body }) => layOnLot(context, params.id, body),
+  );
 
   return router;
 }

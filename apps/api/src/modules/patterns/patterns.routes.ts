@@ -1,12 +1,15 @@
 import { Router } from 'express';
 import {
   addPattern as addPatternEndpoint,
+  adviseCut as adviseCutEndpoint,
+  type CutAdviceReply,
   changePattern as changePatternEndpoint,
   listPatterns as listPatternsEndpoint,
   listPatternVersions,
   readPattern,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { adviseCut } from '../../flows/advice/advise-cut.ts';
 import { addPattern, changePattern } from '../../flows/save-pattern.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
@@ -68,6 +71,14 @@ export function patternRoutes(context: Context): Router {
       if (body.definition !== undefined) return layoutFor(context, body.definition);
       return (await asItIs(context, params.id)).worked;
     },
+  );
+
+  serve(
+    router,
+    context,
+    adviseCutEndpoint,
+    (_work, _asked, advice: CutAdviceReply) => Promise.resolve(advice),
+    ({ params, body }) => adviseCut(context, params.id, body),
   );
 
   return router;

@@ -1,0 +1,115 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { CutAdviceReply } from '@hidewright/contract';
+import { coaster } from '../../testing/example-pattern.ts';
+import { ft2, stockUp } from '../../testing/stockroom.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let shop: Awaited<ReturnType<typeof startTestShop>>;
+let leatherId: number;
+let patternId: number;
+beforeAll(async () => {
+  shop = await startTestShop();
+  leatherId = (await stockUp(shop)).leatherId;
+  patternId = await addPattern('Coaster', coaster(leatherId));
+});
+afterAll(() => shop.close());
+
+async function addPattern(name: string, definition: object): Promise<number> {
+  const { body } = await shop
+    .as('owner')
+    .post('/api/patterns')
+    .send({ name, definition })
+    .expect(201);
+  return body.id as number;
+}
+
+async function hang(): Promise<number> {
+  const lot = { leatherId, form: 'side', measuredAreaMm2: ft2(20), cost: '200.00' };
+  const { body } = await shop
+    .as('owner')
+    .post('/api/receipts')
+    .send({ lots: [lot] })
+    .expect(201);
+  return body.lots[0].id as number;
+}
+
+const panels = [
+  { widthMm: '279.4', heightMm: '330.2', price: '9.00' },
+  { widthMm: '304.8', heightMm: '609.6', price: null },
+];
+const advise = (id: number, body: object) =>
+  shop.as('owner').post(`/api/patterns/${id}/cut-advice`).send(body);
+
+describe('advice on what to cut from', () => {
+  it('compares panels, strips and lots, with the whole price beside the share', async () => {
+    const lotId = await hang();
+    const reply = await advise(patternId, { good: 50, panels }).expect(200);
+    const { cut, rows, rack } = reply.body as CutAdviceReply;
+    expect(cut).toBe(60);
+    const [small] = rows;
+    expect(small).toMatchObject({ kind: 'panel', estimated: false });
+    expect(small?.needed).toBe(Math.ceil(60 / (small?.pieces ?? 1)));
+    expect(small?.wholePrice).toBe(((small?.needed ?? 0) * 9).toFixed(2));
+    expect(Number(small?.sharePrice)).toBeLessThanOrEqual(Number(small?.wholePrice));
+    expect(rows.filter(({ cheapest }) => cheapest)).toHaveLength(1);
+    const strips = rows.filter(({ kind }) => kind === 'strip');
+    expect(strips).toHaveLength(3);
+    for (const { lengthMm, widthMm } of strips) {
+      expect(Number(lengthMm) * Number(widthMm)).toBeGreaterThan(60 * Math.PI * 47.5 ** 2);
+      expect(Number(widthMm)).toBeLessThanOrEqual(300);
+    }
+    const lot = rows.find((row) => row.lotId === lotId);
+    expect(lot).toMatchObject({ kind: 'lot', estimated: true, needed: 1 });
+    expect(rack).toHaveLength(1);
+  });
+
+  it('lays the pieces on a side that is drawn', async () => {
+    const lotId = await hang();
+    const outline = [
+      { x: 0, y: 0 },
+      { x: 2000, y: 0 },
+      { x: 2000, y: 900 },
+      { x: 0, y: 900 },
+    ];
+    await shop
+      .as('owner')
+      .put(`/api/lots/${lotId}/drawing`)
+      .set('If-Match', '"1"')
+      .send({ outline, flaws: [], usablePercent: '85' })
+      .expect(200);
+    const laid = await shop
+      .as('maker')
+      .post(`/api/lots/${lotId}/layouts`)
+      .send({ patternId })
+      .expect(201);
+    expect(laid.body.placements).toHaveLength(laid.body.pieces);
+    const reply = await advise(patternId, { good: 50, panels: [] }).expect(200);
+    const row = (reply.body as CutAdviceReply).rows.find((each) => each.lotId === lotId);
+    expect(row).toMatchObject({ pieces: laid.body.pieces, estimated: false });
+  });
+
+  it('asks for a drawing where there is none', async () => {
+    const handCount = { pieces: 21, widthMm: '279.4', heightMm: '330.2' };
+    const counted = coaster(leatherId, {
+      layoutBy: 'hand count',
+      handCount,
+      outline: null,
+      container: null,
+    });
+    const byHand = await addPattern('Counted', counted);
+    const { body } = await advise(byHand, { good: 50, panels }).expect(422);
+    expect(body.errors[0].field).toBe('outline');
+    const lotId = await hang();
+    const blank = await shop.as('owner').post(`/api/lots/${lotId}/layouts`).send({ patternId });
+    expect(blank.status).toBe(422);
+    expect(blank.body.errors[0].message).toContain('Draw the edge');
+  });
+
+  it('is the owner’s alone', async () => {
+    await shop
+      .as('maker')
+      .post(`/api/patterns/${patternId}/cut-advice`)
+      .send({ good: 5, panels })
+      .expect(403);
+  });
+});

@@ -1,0 +1,109 @@
+import {
+  adviseCut as compare,
+  adviseLots,
+  cutCount,
+  goodShare,
+  minorDigits,
+  type CutAdvice,
+} from '@hidewright/domain';
+import {
+  layoutSourceOf,
+  type adviseCut as adviseCutEndpoint,
+  type BodyOf,
+  type CutAdviceReply,
+  type PatternDefinition,
+} from '@hidewright/contract';
+import type { Context } from '../../context.ts';
+import { priceText } from '../../http/decimal-text.ts';
+import { invalid, notFound } from '../../http/problem.ts';
+import { Leather } from '../../modules/leathers/leather.entity.ts';
+import { Pattern } from '../../modules/patterns/pattern.entity.ts';
+import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts';
+import { Press } from '../../modules/presses/press.entity.ts';
+import { Workshop } from '../../modules/workshop/workshop.entity.ts';
+import type { AdvisedSource } from './advised-source.ts';
+import { lotSources } from './lot-sources.ts';
+import { panelSources } from './panel-sources.ts';
+import { priceOfArea } from './price-of-area.ts';
+import { areaPerPiece, stripSources } from './strip-sources.ts';
+import { stripWidths } from './strip-widths.ts';
+
+/**
+ * What a run of a pattern is best cut from: the panels on offer, strips of the widths that a press takes, and the
+ * lots on the rack, each with the whole price beside the share that the run uses.
+ * @throws {Problem} 404, 422 for a pattern without an outline
+ */
+export async function adviseCut(
+  context: Context,
+  patternId: number,
+  { good, panels }: BodyOf<typeof adviseCutEndpoint>,
+): Promise<CutAdviceReply> {
+  const em = context.orm.em.fork();
+  const pattern = await em.findOne(Pattern, patternId);
+  if (pattern === null) throw notFound('pattern');
+  const version = await em.findOneOrFail(PatternVersion, {
+    patternId,
+    number: pattern.latestVersion,
+  });
+  const definition = version.definition as PatternDefinition;
+  const rules = rulesOf(definition);
+  const workshop = await em.findOneOrFail(Workshop, 1);
+  const leather = await em.findOneOrFail(Leather, definition.leatherId);
+  const priceOf = priceOfArea(priceText(leather.pricePerFt2));
+  const widths = stripWidths(rules.outline, rules.trimMm, await em.find(Press, { active: true }));
+  const strips = await stripSources(context, rules, widths, priceOf);
+  const asked = { ...definition, layoutBy: 'outline' as const, handCount: null };
+  const sources = [
+    ...(await panelSources(context, asked, rules.outline, panels, priceOf)),
+    ...strips,
+    ...(await lotSources(context, definition, strips[0] ? areaPerPiece(strips[0]) : null)),
+  ];
+  const { pieces: cut } = cutCount({
+    good,
+    rate: goodShare(definition.work),
+    confidence: workshop.confidencePercent.div(100).toNumber(),
+  });
+  const run = { cut, good, minorDigits: minorDigits(workshop.currency) };
+  const advice = compare(
+    run,
+    sources.map(({ source }) => source),
+  );
+  return {
+    good,
+    cut,
+    rows: sources.map((source, at) => rowOf(source, advice[at] as CutAdvice, cut)),
+    rack: adviseLots(sources.flatMap(rackLotOf), cut),
+  };
+}
+
+function rulesOf(definition: PatternDefinition) {
+  const container = definition.container ?? { form: 'panel' as const, widthMm: '1', heightMm: '1' };
+  if (definition.outline === null) {
+    const message =
+      'This pattern is counted by hand. Draw its outline to compare what to cut from.';
+    throw invalid([{ field: 'outline', message }]);
+  }
+  const source = layoutSourceOf({ ...definition, layoutBy: 'outline', container });
+  if (source.by !== 'outline') throw new TypeError('An outline was asked for.');
+  const { container: _container, search: _search, ...rules } = source.input;
+  return rules;
+}
+
+function rowOf(
+  { source, shown, periodMm, offcutAfter }: AdvisedSource,
+  { key: _key, ...advice }: CutAdvice,
+  cut: number,
+): CutAdviceReply['rows'][number] {
+  const { needed } = advice;
+  const last = needed === null ? 0 : cut - (needed - 1) * source.pieces;
+  return {
+    ...shown,
+    ...advice,
+    pieces: source.pieces,
+    lengthMm: needed === null || periodMm === null ? null : (needed * periodMm).toFixed(0),
+    offcut: last > 0 && last < source.pieces ? (offcutAfter?.(last) ?? null) : null,
+  };
+}
+
+const rackLotOf = ({ source: { pieces }, shown: { lotId, tag } }: AdvisedSource) =>
+  lotId === null || tag === null ? [] : [{ lotId, tag, pieces }];

@@ -1,0 +1,75 @@
+import { outlinePath, type SideInput, type SideLayout } from '@hidewright/domain';
+import {
+  outlineOf,
+  type LotDrawing,
+  type LotLayout,
+  type PatternDefinition,
+} from '@hidewright/contract';
+import type { Context } from '../context.ts';
+import { invalid, notFound } from '../http/problem.ts';
+import { sideLayoutFor, type Worked } from '../modules/layouts/stored-layouts.ts';
+import { Lot } from '../modules/lots/lot.entity.ts';
+import { Pattern } from '../modules/patterns/pattern.entity.ts';
+import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
+
+/** A pattern laid on a lot, with the names that go with it. */
+export interface LaidOnLot {
+  lotId: number;
+  tag: string;
+  patternId: number;
+  patternName: string;
+  outlinePath: string;
+  worked: Worked<SideInput, SideLayout>;
+}
+
+/**
+ * How a pattern's pieces lie on a lot as it is drawn; a worker may have to work it out, so this comes before the
+ * transaction that keeps it.
+ * @throws {Problem} 404, 422 where the lot or the pattern is not drawn
+ */
+export async function layOnLot(
+  context: Pick<Context, 'orm' | 'workers'>,
+  lotId: number,
+  { patternId, search }: { patternId: number; search: 'rows' | 'best' },
+): Promise<LaidOnLot> {
+  const em = context.orm.em.fork();
+  const lot = await em.findOne(Lot, lotId);
+  if (lot === null) throw notFound('lot');
+  const pattern = await em.findOne(Pattern, patternId);
+  if (pattern === null) throw fault('This pattern is not there. Choose one from the list.');
+  const version = await em.findOneOrFail(PatternVersion, {
+    patternId,
+    number: pattern.latestVersion,
+  });
+  const input = sideInputOf(lot, version.definition as PatternDefinition);
+  if (typeof input === 'string') throw fault(input);
+  const worked = await sideLayoutFor(context, { ...input, search });
+  return {
+    lotId,
+    tag: lot.tag,
+    patternId,
+    patternName: pattern.name,
+    outlinePath: outlinePath(input.outline),
+    worked,
+  };
+}
+
+/** What the domain is asked, or what is missing for it. */
+export function sideInputOf(lot: Lot, definition: PatternDefinition): SideInput | string {
+  const edge = lot.outline as LotDrawing['outline'];
+  if (edge === null) return `Draw the edge of ${lot.tag} first.`;
+  if (definition.outline === null) return 'This pattern has no outline to lay. Draw one first.';
+  return {
+    outline: outlineOf(definition.outline),
+    spacingMm: Number(definition.spacingMm),
+    trimMm: Number(definition.trimMm),
+    turns: definition.turns,
+    side: { outline: edge, flaws: lot.flaws as LotDrawing['flaws'] },
+  };
+}
+
+export function laidOnLotReply({ worked, ...names }: LaidOnLot): LotLayout {
+  return { ...names, ...worked.layout };
+}
+
+const fault = (message: string) => invalid([{ field: 'patternId', message }]);
