@@ -1,7 +1,10 @@
+import type { DrawnSide } from '@hidewright/domain';
 import { useId } from 'react';
 import { lengthFigure, lengthUnits } from '../lib/units.ts';
 import { useWorkshop } from '../lib/workshop.tsx';
 import { LayoutPiece } from './layout-piece.tsx';
+import { ZoomFrame } from './zoom-frame.tsx';
+import { SidePaths } from './side-paths.tsx';
 import { usePathBox } from './use-path-box.ts';
 
 export interface Placement {
@@ -17,6 +20,10 @@ interface LayoutPictureProps {
   placements: readonly Placement[];
   widthMm: number;
   heightMm: number;
+  /** A side as it was drawn, where it is no rectangle. */
+  side?: DrawnSide | undefined;
+  /** What goes back on the rack. */
+  offcut?: { x: number; y: number; widthMm: number; heightMm: number } | undefined;
   /** How many pieces the spoilage allowance will cost: the last ones are hatched. */
   allowance?: number | undefined;
   /** Along which side the backbone ran. */
@@ -35,6 +42,8 @@ export function LayoutPicture(props: LayoutPictureProps) {
     heightMm,
     allowance = 0,
     spine = 'across',
+    side,
+    offcut,
     title,
   } = props;
   const { lengthUnit } = useWorkshop();
@@ -49,38 +58,56 @@ export function LayoutPicture(props: LayoutPictureProps) {
   const hatched = allowance > 0 ? `; ${allowance} hatched for the spoilage allowance` : '';
   return (
     <figure className={props.className}>
-      <svg
-        role="img"
-        aria-labelledby={`${id}-title ${id}-desc`}
-        viewBox={`${-margin} ${-margin} ${widthMm + 2 * margin} ${heightMm + 2 * margin}`}
-        className="block h-auto max-h-[30rem] w-full"
-      >
-        <title id={`${id}-title`}>{title}</title>
-        <desc id={`${id}-desc`}>
-          {`${placements.length} pieces from ${size} ${sign}${hatched}; the spine runs ${spine}.`}
-        </desc>
-        <defs>
-          <Hatch id={`${id}-hatch`} spacing={Math.max(box.width, box.height) / 14} />
-          <path ref={measure} id={`${id}-outline`} d={outlinePath} />
-        </defs>
-        <rect
-          width={widthMm}
-          height={heightMm}
-          className="fill-panel stroke-edge"
-          strokeWidth={1.5}
-          vectorEffect="non-scaling-stroke"
-        />
-        {placements.map((placement, index) => (
-          <LayoutPiece
-            key={index}
-            number={index + 1}
-            placement={placement}
-            outlineId={`${id}-outline`}
-            hatchId={index >= firstHatched ? `${id}-hatch` : undefined}
-            box={box}
-          />
-        ))}
-      </svg>
+      <ZoomFrame label={title} zooms={placements.length > 8}>
+        <svg
+          role="img"
+          aria-labelledby={`${id}-title ${id}-desc`}
+          viewBox={`${-margin} ${-margin} ${widthMm + 2 * margin} ${heightMm + 2 * margin}`}
+          className="block h-auto max-h-full w-full"
+        >
+          <title id={`${id}-title`}>{title}</title>
+          <desc id={`${id}-desc`}>
+            {`${placements.length} pieces from ${size} ${sign}${hatched}; the spine runs ${spine}.`}
+          </desc>
+          <defs>
+            <Hatch id={`${id}-hatch`} spacing={Math.max(box.width, box.height) / 14} />
+            <path ref={measure} id={`${id}-outline`} d={outlinePath} />
+          </defs>
+          {side ? (
+            <SidePaths side={side} />
+          ) : (
+            <rect
+              width={widthMm}
+              height={heightMm}
+              className="fill-panel stroke-edge"
+              strokeWidth={1.5}
+              vectorEffect="non-scaling-stroke"
+            />
+          )}
+          {offcut && (
+            <rect
+              x={offcut.x}
+              y={offcut.y}
+              width={offcut.widthMm}
+              height={offcut.heightMm}
+              className="fill-verdigris-pale stroke-verdigris"
+              strokeWidth={1.5}
+              strokeDasharray="5 3"
+              vectorEffect="non-scaling-stroke"
+            />
+          )}
+          {placements.map((placement, index) => (
+            <LayoutPiece
+              key={index}
+              number={index + 1}
+              placement={placement}
+              outlineId={`${id}-outline`}
+              hatchId={index >= firstHatched ? `${id}-hatch` : undefined}
+              box={box}
+            />
+          ))}
+        </svg>
+      </ZoomFrame>
       <figcaption className="mt-2 flex flex-wrap justify-between gap-x-6 text-ink-soft">
         <span>{`${size} ${sign}`}</span>
         <SpineArrow spine={spine} />

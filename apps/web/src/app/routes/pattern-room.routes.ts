@@ -24,6 +24,11 @@ export const patternRoomRoutes: RouteObject[] = [
             lazy: () => import('./pattern-room/pattern.tsx'),
           },
           {
+            path: ':id/cut-from',
+            handle: { crumb: nameOf },
+            lazy: () => import('./pattern-room/cut-from.tsx'),
+          },
+          {
             path: ':id/change',
             handle: { crumb: nameOf },
             lazy: () => import('./pattern-room/change-pattern.tsx'),

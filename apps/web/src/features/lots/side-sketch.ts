@@ -60,6 +60,3 @@ export function boxOf(points: readonly Point[]): Box {
   const [x, y] = [Math.min(...xs), Math.min(...ys)];
   return { x, y, width: Math.max(...xs) - x, height: Math.max(...ys) - y };
 }
-
-export const curvePath = (points: readonly Point[]): string =>
-  `M ${points.map(({ x, y }) => `${x} ${y}`).join(' L ')} Z`;

@@ -1,4 +1,10 @@
-import { addHardware, addLeather, addPattern, changePattern } from '@hidewright/contract';
+import {
+  addHardware,
+  addLeather,
+  addPattern,
+  adviseCut,
+  changePattern,
+} from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
 
 export const useAddPattern = () => useSend(addPattern);
@@ -8,3 +14,6 @@ export const useChangePattern = () => useSend(changePattern);
 export const useAddLeather = () => useSend(addLeather);
 
 export const useAddHardware = () => useSend(addHardware);
+
+/** It only reckons: nothing that is shown elsewhere changes. */
+export const useAdviseCut = () => useSend(adviseCut, { invalidates: [] });

@@ -77,6 +77,11 @@ function Actions({ pattern }: { pattern: Pattern }) {
           Quote it
         </LinkButton>
       )}
+      {pattern.definition.outline !== null && (
+        <LinkButton to={`/pattern-room/patterns/${pattern.id}/cut-from`}>
+          What to cut from
+        </LinkButton>
+      )}
       <LinkButton to={`/pattern-room/patterns/${pattern.id}/change`}>Change</LinkButton>
       <PutAwayButton pattern={pattern} />
     </>

@@ -1,15 +1,17 @@
 import type { Lot } from '@hidewright/contract';
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
 import { Ticket } from '../../../components/ticket.tsx';
 import { ChangeLotForm } from '../../../features/lots/components/change-lot-form.tsx';
+import { patternsQuery } from '../../../features/patterns/patterns.queries.ts';
 import { LotFacts } from '../../../features/lots/components/lot-facts.tsx';
+import { LayOnLot } from '../../../features/lots/components/lay-on-lot.tsx';
 import { SideCard } from '../../../features/lots/components/side-card.tsx';
 import { formText } from '../../../features/lots/lot-words.ts';
-import { lotQuery } from '../../../features/lots/lots.queries.ts';
+import { lotDrawingQuery, lotQuery } from '../../../features/lots/lots.queries.ts';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
 import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
@@ -51,7 +53,12 @@ export function Component() {
         }
         aside={<HeldAndAdjust item={item} handlesStock={handlesStock} />}
       >
-        {handlesStock && lot.form !== 'panel' && lot.form !== 'strip' && <SideCard lot={lot} />}
+        {handlesStock && lot.form !== 'panel' && lot.form !== 'strip' && (
+          <>
+            <SideCard lot={lot} />
+            <WhatItGives lotId={lot.id} leatherName={lot.leatherName} />
+          </>
+        )}
         <Card title="Movements">
           <MovementsTable item={item} />
         </Card>
@@ -62,6 +69,24 @@ export function Component() {
         )}
       </ItemLayout>
     </div>
+  );
+}
+
+/** Once it is drawn: laying the patterns of its leather on it. */
+function WhatItGives({ lotId, leatherName }: { lotId: number; leatherName: string }) {
+  const { data: drawing } = useQuery(lotDrawingQuery(lotId));
+  const { data: patterns } = useQuery(patternsQuery());
+  if (!drawing?.outline || !patterns) return null;
+  const drawn = patterns.items.filter(
+    (pattern) =>
+      pattern.active && pattern.outlinePath !== null && pattern.leatherName === leatherName,
+  );
+  return (
+    <LayOnLot
+      key={drawing.version}
+      lotId={lotId}
+      patterns={drawn.map(({ id, name }) => ({ value: id, label: name }))}
+    />
   );
 }
 

@@ -1,6 +1,7 @@
 import type { Point } from '@hidewright/domain';
 import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
-import { boxOf, curvePath, type SideSketch } from '../side-sketch.ts';
+import { SidePaths } from '../../../components/side-paths.tsx';
+import { boxOf, type SideSketch } from '../side-sketch.ts';
 
 interface SideCanvasProps {
   sketch: SideSketch;
@@ -73,21 +74,7 @@ export function SideCanvas(props: SideCanvasProps) {
         onClose();
       }}
     >
-      <path
-        d={curvePath(sketch.outline)}
-        className="fill-panel stroke-edge"
-        strokeWidth={1.5}
-        vectorEffect="non-scaling-stroke"
-      />
-      {sketch.flaws.map((flaw, at) => (
-        <path
-          key={at}
-          d={curvePath(flaw)}
-          className="fill-oxblood/30 stroke-oxblood"
-          strokeWidth={1.5}
-          vectorEffect="non-scaling-stroke"
-        />
-      ))}
+      <SidePaths side={sketch} />
       {sketch.underWay.length > 0 && (
         <path
           d={`M ${sketch.underWay.map(({ x, y }) => `${x} ${y}`).join(' L ')}`}

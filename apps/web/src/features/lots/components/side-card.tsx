@@ -3,7 +3,8 @@ import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
-import { boxOf, curvePath } from '../side-sketch.ts';
+import { SidePaths } from '../../../components/side-paths.tsx';
+import { boxOf } from '../side-sketch.ts';
 import { lotDrawingQuery } from '../lots.queries.ts';
 import { SideEditor } from './side-editor.tsx';
 
@@ -62,21 +63,7 @@ function Drawn({ outline, flaws }: DrawnProps) {
       viewBox={`${x - 10} ${y - 10} ${width + 20} ${height + 20}`}
       className="block h-auto max-h-80 w-full"
     >
-      <path
-        d={curvePath(outline)}
-        className="fill-panel stroke-edge"
-        strokeWidth={1.5}
-        vectorEffect="non-scaling-stroke"
-      />
-      {flaws.map((flaw, at) => (
-        <path
-          key={at}
-          d={curvePath(flaw)}
-          className="fill-oxblood/30 stroke-oxblood"
-          strokeWidth={1.5}
-          vectorEffect="non-scaling-stroke"
-        />
-      ))}
+      <SidePaths side={{ outline, flaws }} />
     </svg>
   );
 }

@@ -1,0 +1,28 @@
+import type { DrawnSide } from '@hidewright/domain';
+
+/** A closed curve through points, as SVG path data. */
+const curvePath = (points: readonly { x: number; y: number }[]): string =>
+  `M ${points.map(({ x, y }) => `${x} ${y}`).join(' L ')} Z`;
+
+/** The edge of a side and its flaws. */
+export function SidePaths({ side: { outline, flaws } }: { side: DrawnSide }) {
+  return (
+    <>
+      <path
+        d={curvePath(outline)}
+        className="fill-panel stroke-edge"
+        strokeWidth={1.5}
+        vectorEffect="non-scaling-stroke"
+      />
+      {flaws.map((flaw, at) => (
+        <path
+          key={at}
+          d={curvePath(flaw)}
+          className="fill-oxblood/30 stroke-oxblood"
+          strokeWidth={1.5}
+          vectorEffect="non-scaling-stroke"
+        />
+      ))}
+    </>
+  );
+}
