@@ -53,6 +53,8 @@ export type { NestBounds } from './nest/bounds.ts';
 export { nestFaults } from './nest/nest-faults.ts';
 export { readNestCase } from './nest/case-file.ts';
 export { nestAnswer } from './nest/answer-nest.ts';
+export { packRectangles } from './nest/rectangles.ts';
+export type * from './nest/rectangles.ts';
 
 export * from './rejects/cut-count.ts';
 export * from './rejects/allowance.ts';
