@@ -12,7 +12,7 @@ const drawing = readDrawing(
 
 describe('the outline chosen in a drawing', () => {
   it('is the curve with the holes kept, about the origin', () => {
-    expect(holesWithin(drawing, 0).map(({ id }) => id)).toEqual([1, 2]);
+    expect(holesWithin(drawing, 0).map(({ id }) => id)).toEqual([1, 2, 3]);
     const outline = outlineFromDrawing(drawing, 0, [1]);
     expect(outlineArea(outline)).toBeCloseTo(110 * 90 - (4 - Math.PI) * 64, 0);
     expect(cuttingEdgeMm(outline)).toBeCloseTo(400 - 64 + 16 * Math.PI + 28, 1);
@@ -29,9 +29,10 @@ describe('the outline chosen in a drawing', () => {
     });
   });
 
-  it('keeps only holes that lie directly in it', () => {
+  it('keeps only holes that lie in it, and none within another', () => {
     expect(() => outlineFromDrawing(drawing, 0, [4])).toThrow('lie in the chosen curve');
-    expect(() => outlineFromDrawing(drawing, 0, [3])).toThrow('lie in the chosen curve');
+    expect(outlineFromDrawing(drawing, 0, [3]).punched).toHaveLength(1);
+    expect(() => outlineFromDrawing(drawing, 0, [2, 3])).toThrow('lies within hole 1');
     expect(() => outlineFromDrawing(drawing, 9)).toThrow(
       expect.objectContaining({ field: 'curve' }),
     );

@@ -5,9 +5,15 @@ import { centredHoles, centredPoints } from './drawn-polygon.ts';
 import type { DrawnPolygon, Point } from './outline.ts';
 import { type Ring, toMicrometre, withoutRepeats } from './ring.ts';
 
-/** The closed curves that can be punched with a chosen one: those that lie in it, and in no other of them. */
+/** The closed curves that lie in a chosen one, at any depth: a guide line may lie around a hole. */
 export function holesWithin({ closed }: Drawing, chosen: number): ClosedCurve[] {
-  return closed.filter(({ within }) => within === chosen);
+  const inside = new Set([chosen]);
+  // Larger ones come first, so what a curve lies in has been seen before it.
+  return closed.filter(({ id, within }) => {
+    if (within === null || !inside.has(within)) return false;
+    inside.add(id);
+    return true;
+  });
 }
 
 /**

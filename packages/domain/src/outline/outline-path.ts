@@ -24,10 +24,12 @@ export function outlinePath(outline: Outline): string {
   return [`M ${pair(begin)}`, ...[first, ...rest].map(command), 'Z'].join(' ');
 }
 
-/** A closed curve as path data, its corners in the order given. */
-export function ringPath(ring: readonly Point[]): string {
-  return `M ${ring.map(pair).join(' L ')} Z`;
+/** A line as path data, its corners in the order given. */
+export function linePath(line: readonly Point[]): string {
+  return `M ${line.map(pair).join(' L ')}`;
 }
+
+const ringPath = (ring: readonly Point[]): string => `${linePath(ring)} Z`;
 
 function ellipsePath(radiusX: number, radiusY: number): string {
   const radii = `${number(radiusX)} ${number(radiusY)}`;
