@@ -64,6 +64,8 @@ export function outlineOf(typed: TypedOutline): Outline {
         neckWidthMm: Number(typed.neckWidthMm),
         cornerRadiusMm: Number(typed.cornerRadiusMm),
       };
+    case 'polygon':
+      return typed;
   }
 }
 

@@ -7,7 +7,20 @@ import { outlineOf } from './layout-asked.ts';
 const side = (word: string) => lengthBetween(word, 1, 5000);
 const cornerRadiusMm = lengthBetween('corner radius', 0, 2500);
 
-/** The closed curve that the cutting die cuts, as its measures were typed. */
+/** A place in a drawing, in mm; geometry is in numbers, to a micrometre. */
+const place = z.number('Give every corner as x and y in mm.').min(-10_000).max(10_000);
+const corners = z
+  .array(
+    z.strictObject({ x: place, y: place }),
+    'Choose a drawing, and which of its curves is cut.',
+  )
+  .min(3, 'Draw the outline with at least three corners.')
+  .max(3000, 'Simplify the drawing: at most 3,000 corners can be kept.');
+const holes = z
+  .array(corners, 'Give the holes as closed curves.')
+  .max(200, 'Keep at most 200 holes.');
+
+/** The closed curve that the cutting die cuts: as its measures were typed, or as it was drawn. */
 export const outline = z
   .discriminatedUnion(
     'shape',
@@ -32,8 +45,14 @@ export const outline = z
         neckWidthMm: side('neck width'),
         cornerRadiusMm,
       }),
+      z.strictObject({
+        shape: z.literal('polygon'),
+        points: corners,
+        /** Holes and slots inside it that the die punches as well. */
+        punched: holes.optional(),
+      }),
     ],
-    'Choose round, rectangle, oval or tag.',
+    'Choose round, rectangle, oval, tag or a drawing.',
   )
   .superRefine((typed, context) => {
     if (context.issues.length > 0) return;

@@ -109,6 +109,37 @@ export const listPatternVersions = endpoint({
   reply: z.object({ items: z.array(patternVersion) }),
 });
 
+const templateQuery = z.strictObject({
+  /** How far artwork is to stay from every cut. */
+  safeMarginMm: z.coerce
+    .number('Enter the safe margin in mm, such as 3.')
+    .min(0.1, 'Enter a safe margin of at least 0.1 mm.')
+    .max(100, 'Enter a safe margin of at most 100 mm.')
+    .default(3),
+});
+
+export const patternTemplateSvg = endpoint({
+  method: 'GET',
+  path: '/patterns/{id}/template.svg',
+  summary: 'The outline true to size, for the customer’s artwork',
+  access: readers,
+  params: idParams,
+  query: templateQuery,
+  reply: z.unknown(),
+  file: 'image/svg+xml',
+});
+
+export const patternTemplatePdf = endpoint({
+  method: 'GET',
+  path: '/patterns/{id}/template.pdf',
+  summary: 'The outline true to size, to print, with a line to check the print by',
+  access: readers,
+  params: idParams,
+  query: templateQuery,
+  reply: z.unknown(),
+  file: 'application/pdf',
+});
+
 export const addPattern = endpoint({
   method: 'POST',
   path: '/patterns',

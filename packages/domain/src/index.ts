@@ -28,6 +28,7 @@ export { outlinePath } from './outline/outline-path.ts';
 export { describeOutline } from './outline/describe-outline.ts';
 export type * from './outline/drawing.ts';
 export { readDrawing } from './outline/read-drawing.ts';
+export { safeLine } from './outline/safe-line.ts';
 export { templateSvg } from './outline/template.ts';
 export { holesWithin, outlineFromDrawing } from './outline/outline-from-drawing.ts';
 

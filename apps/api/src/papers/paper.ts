@@ -16,11 +16,23 @@ export const sheet = { width: 595.28, left: 56, right: 539.28, top: 48, bottom: 
 
 export type Paper = PDFKit.PDFDocument;
 
-/** A blank A4 sheet with the program's type; `made` stands in it as its date, so that the same words give the same bytes. */
-export function blankPaper(title: string, author: string, made: Date): Paper {
+const a4 = {
+  size: 'A4',
+  margins: { top: sheet.top, bottom: 40, left: sheet.left, right: sheet.width - sheet.right },
+};
+
+/**
+ * A blank sheet, A4 unless another is asked for, with the program's type; `made` stands in it as its date, so that the
+ * same words give the same bytes.
+ */
+export function blankPaper(
+  title: string,
+  author: string,
+  made: Date,
+  page: Pick<PDFKit.PDFDocumentOptions, 'size' | 'margin' | 'margins'> = a4,
+): Paper {
   const paper = new PDFDocument({
-    size: 'A4',
-    margins: { top: sheet.top, bottom: 40, left: sheet.left, right: sheet.width - sheet.right },
+    ...page,
     info: {
       Title: title,
       Author: author,

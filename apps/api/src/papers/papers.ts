@@ -1,7 +1,13 @@
 import { drawInvoice } from './invoice-pdf.ts';
 import { drawLayout } from './layout-pdf.ts';
 import { drawQuote } from './quote-pdf.ts';
+import { drawTemplate } from './template-pdf.ts';
 
 /** What the program puts on paper: a snapshot in, bytes out. */
-export const papers = { quote: drawQuote, invoice: drawInvoice, layout: drawLayout };
+export const papers = {
+  quote: drawQuote,
+  invoice: drawInvoice,
+  layout: drawLayout,
+  template: drawTemplate,
+};
 export type Papers = typeof papers;

@@ -102,7 +102,9 @@ function ruler(x: number, y: number, length: number, step: number): string {
     { x, y },
     { x: x + length, y },
   ];
-  return [linePath(line), ...ticks.map((at) => `M ${mm(at)} ${mm(y - 2)} V ${mm(y)}`)].join(' ');
+  return [linePath(line), ...ticks.map((at) => `M ${mm(at)} ${mm(y - 2)} V ${mm(y + 0.5)}`)].join(
+    ' ',
+  );
 }
 
 const words = (x: number, y: number, text: string, size = 3): string =>
