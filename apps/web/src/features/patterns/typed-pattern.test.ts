@@ -43,6 +43,17 @@ describe('a pattern in its form', () => {
     expect(patternBody(typedPattern({ name: 'Tag', definition })).definition).toEqual(definition);
   });
 
+  it('is sent with a drawing’s corners and holes, and nothing of how they were chosen', () => {
+    const points = [
+      { x: 0, y: 0 },
+      { x: 40, y: 0 },
+      { x: 0, y: 30 },
+    ];
+    const outline = { shape: 'polygon' as const, points, punched: [points] };
+    const pattern = { name: 'Drawn', definition: { ...tag, outline } };
+    expect(patternBody(typedPattern(pattern))).toEqual(pattern);
+  });
+
   it('forgets the measures of a shape that is no longer chosen, and the drawing that is no longer wanted', () => {
     const typed = typedPattern({ name: 'Tag', definition: tag }) as { definition: object };
     const outline = { shape: 'round', diameterMm: '95', neckWidthMm: '22' };

@@ -14,6 +14,7 @@ const outlineMeasures: Record<string, readonly string[]> = {
   rectangle: ['widthMm', 'heightMm', 'cornerRadiusMm'],
   oval: ['widthMm', 'heightMm'],
   tag: ['lengthMm', 'widthMm', 'neckLengthMm', 'neckWidthMm', 'cornerRadiusMm'],
+  polygon: ['points', 'punched'],
 };
 const containerMeasures: Record<string, readonly string[]> = {
   panel: ['widthMm', 'heightMm'],
@@ -45,6 +46,10 @@ const blankDefinition = {
     lengthMm: '',
     neckLengthMm: '',
     neckWidthMm: '',
+    // Said about a drawing, and not sent: what comes of it is in `points` and `punched`.
+    curve: '',
+    kept: {},
+    knownWidthMm: '',
   },
   handCount: { pieces: '', widthMm: '', heightMm: '' },
   container: { form: 'panel', widthMm: '', heightMm: '', lengthMm: '' },

@@ -9,6 +9,7 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { LayoutDrawing } from '../../../features/patterns/components/layout-drawing.tsx';
 import { PutAwayButton } from '../../../features/patterns/components/put-away-button.tsx';
+import { TemplateLinks } from '../../../features/patterns/components/template-links.tsx';
 import { VersionsList } from '../../../features/patterns/components/versions-list.tsx';
 import { WhatItTakes } from '../../../features/patterns/components/what-it-takes.tsx';
 import { layoutSubtitle } from '../../../features/patterns/layout-words.ts';
@@ -50,11 +51,14 @@ export function Component() {
         <div className="grid gap-5">
           <Card title="What it takes">
             {outlinePath !== null && (
-              <OutlinePicture
-                outlinePath={outlinePath}
-                title={`Outline of ${name}`}
-                className="mb-5 max-w-48"
-              />
+              <>
+                <OutlinePicture
+                  outlinePath={outlinePath}
+                  title={`Outline of ${name}`}
+                  className="mb-3 max-w-48"
+                />
+                <TemplateLinks patternId={id} />
+              </>
             )}
             <WhatItTakes pattern={pattern} />
           </Card>

@@ -1,6 +1,8 @@
 import { LengthField } from '../../../components/length-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
+import { useDrawing } from '../use-drawing.ts';
 import { useFreshErrors } from '../use-fresh-errors.ts';
+import { DrawingFields } from './drawing-fields.tsx';
 import { FieldRow } from './field-row.tsx';
 
 const shapes = [
@@ -8,6 +10,7 @@ const shapes = [
   { value: 'rectangle', label: 'Rectangle', detail: 'with corner radius' },
   { value: 'oval', label: 'Oval' },
   { value: 'tag', label: 'Tag', detail: 'with a neck' },
+  { value: 'polygon', label: 'From a drawing (SVG)', detail: 'any shape, with its holes' },
 ];
 
 const cornerRadius = {
@@ -38,19 +41,25 @@ const measures: Record<string, readonly { name: string; label: string; help?: st
 /** The closed curve that the cutting die cuts. */
 export function OutlineFields() {
   const shape = useFreshErrors('definition.outline', 'shape');
+  // Kept here, so that a look at another shape does not close the file.
+  const drawing = useDrawing();
   return (
     <>
       <RadioCards name="definition.outline.shape" label="Outline" cards={shapes} across />
-      <FieldRow>
-        {(measures[shape] ?? []).map(({ name, ...labels }) => (
-          <LengthField
-            key={`${shape} ${name}`}
-            name={`definition.outline.${name}`}
-            whenEmpty="text"
-            {...labels}
-          />
-        ))}
-      </FieldRow>
+      {shape === 'polygon' ? (
+        <DrawingFields {...drawing} />
+      ) : (
+        <FieldRow>
+          {(measures[shape] ?? []).map(({ name, ...labels }) => (
+            <LengthField
+              key={`${shape} ${name}`}
+              name={`definition.outline.${name}`}
+              whenEmpty="text"
+              {...labels}
+            />
+          ))}
+        </FieldRow>
+      )}
     </>
   );
 }
