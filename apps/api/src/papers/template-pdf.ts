@@ -99,7 +99,8 @@ function drawHead(paper: Paper, template: TemplatePaper, tiling: Tiling, tile: T
     ? `; sheet ${tile.row * columns + tile.column + 1} of ${columns * rows}: row ${tile.row + 1}, column ${tile.column + 1}, glued ${overlap} mm over each other`
     : '';
   paper.font('plain').fontSize(9).fillColor(inkSoft);
-  paper.text(`${template.description}; true to size${place}`, left, 14 * point, line);
+  const dashed = `dashed: ${template.safeMarginMm} mm from the cut`;
+  paper.text(`${template.description}; ${dashed}; true to size${place}`, left, 14 * point, line);
 }
 
 const checkMm = 100;

@@ -144,6 +144,28 @@ describe('the curves of a drawing', () => {
     ]);
   });
 
+  it('leave out a background measured in per cent', () => {
+    const { closed, leftOut } = readDrawing(
+      svg('<rect width="100%" height="100%"/><rect width="9" height="9"/>'),
+    );
+    expect(closed).toHaveLength(1);
+    expect(leftOut).toEqual(['What is measured in per cent, as a background is, is left out.']);
+  });
+
+  it('have their area times the determinant under any transform', () => {
+    const number = fc.integer({ min: -40, max: 40 }).map((tenths) => tenths / 10);
+    fc.assert(
+      fc.property(fc.tuple(number, number, number, number, number, number), (matrix) => {
+        const [a, b, c, d] = matrix;
+        const times = Math.abs(a * d - b * c);
+        fc.pre(times > 0.05);
+        const inside = `<g transform="matrix(${matrix.join(' ')})"><circle cx="3" cy="9" r="5"/></g>`;
+        const { area, edge } = only(svg(inside));
+        expect(Math.abs(area - times * Math.PI * 25)).toBeLessThan(0.01 * edge);
+      }),
+    );
+  });
+
   it('saved in pieces are joined where exactly two ends meet', () => {
     const pieces =
       '<line x1="0" y1="0" x2="40" y2="0"/><line x1="40" y1="20" x2="40" y2="0.004"/>' +

@@ -60,7 +60,12 @@ function unscaledTolerance({ strokes }: Drawn): number {
   return (most > 0 ? most : 1) * unscaledShare;
 }
 
-function found({ strokes, texts }: Drawn, scale: Matrix, tolerance: number, mm: boolean): Drawing {
+function found(
+  { strokes, texts, shares }: Drawn,
+  scale: Matrix,
+  tolerance: number,
+  mm: boolean,
+): Drawing {
   const lines = joinEnds(flattened(strokes, scale, tolerance), tolerance);
   const { closed, repeated, flat } = closedCurves(lines, tolerance);
   const open = openCurves(lines);
@@ -72,7 +77,7 @@ function found({ strokes, texts }: Drawn, scale: Matrix, tolerance: number, mm: 
     closed,
     open,
     likely: likelyOf(closed),
-    leftOut: leftOut(texts, repeated, flat),
+    leftOut: leftOut({ texts, shares, repeated, flat }),
   };
 }
 
@@ -86,9 +91,11 @@ function flattened(strokes: PlacedStroke[], scale: Matrix, tolerance: number) {
 
 const likelyOf = ([largest]: ClosedCurve[]): number | null => largest?.id ?? null;
 
-function leftOut(texts: number, repeated: number, flat: number): string[] {
+function leftOut(counts: Record<'texts' | 'shares' | 'repeated' | 'flat', number>): string[] {
+  const { texts, shares, repeated, flat } = counts;
   const sentences: string[] = [];
   if (texts > 0) sentences.push('Lettering is left out: turn it into curves if it is to be cut.');
+  if (shares > 0) sentences.push('What is measured in per cent, as a background is, is left out.');
   if (repeated > 0) sentences.push(`${curves(repeated)} drawn twice, and kept once.`);
   if (flat > 0) sentences.push(`${curves(flat)} without any area, and left out.`);
   return sentences;

@@ -26,6 +26,7 @@ const inch = 25.4;
 export function templateSvg(outline: Outline, { name, safeMarginMm }: TemplateOptions): string {
   const page = pageOf(outlineBounds(outline));
   const title = escaped(name);
+  const safe = safeLine(outline, safeMarginMm).map(linePath).join(' ');
   const size = `width="${mm(page.width)}mm" height="${mm(page.height)}mm"`;
   const view = [page.minX, page.minY, page.width, page.height].map(mm).join(' ');
   return [
@@ -33,17 +34,13 @@ export function templateSvg(outline: Outline, { name, safeMarginMm }: TemplateOp
     `<svg xmlns="http://www.w3.org/2000/svg" ${size} viewBox="${view}" fill="none" stroke="#000" stroke-width="0.2">`,
     `<title>${title}: template, true to size</title>`,
     `<path id="cut" d="${outlinePath(outline)}"/>`,
-    ...safePath(outline, safeMarginMm),
+    ...(safe === '' ? [] : [safePath(safe)]),
     ...spine(page),
     ...rulers(page),
     `<g fill="#000" stroke="none" font-family="sans-serif" font-size="3">`,
-    words(page.minX + 5, page.minY + 6, title, 4),
+    words(page.minX + 5, page.minY + 6, title, titleHeight(page, name)),
     words(page.minX + 5, page.minY + 10.5, 'True to size: print at 100 %, not fitted to the page.'),
-    words(
-      page.minX + 5,
-      page.maxY - 12,
-      `Dashed: keep artwork ${mm(safeMarginMm)} mm from the cut.`,
-    ),
+    ...(safe === '' ? [] : [safeWords(page, safeMarginMm)]),
     words(page.minX + 6, page.maxY - 2, '50 mm'),
     words(page.minX + 62, page.maxY - 2, '2 in'),
     '</g>',
@@ -72,12 +69,15 @@ function pageOf({ minX, minY, maxX, maxY }: Bounds): Page {
   };
 }
 
-function safePath(outline: Outline, marginMm: number): string[] {
-  const lines = safeLine(outline, marginMm);
-  if (lines.length === 0) return [];
-  const path = lines.map(linePath).join(' ');
-  return [`<path id="safe" stroke-dasharray="2 1" stroke="#555" d="${path}"/>`];
-}
+const safePath = (path: string): string =>
+  `<path id="safe" stroke-dasharray="2 1" stroke="#555" d="${path}"/>`;
+
+const safeWords = ({ minX, maxY }: Page, marginMm: number): string =>
+  words(minX + 5, maxY - 12, `Dashed: keep artwork ${mm(marginMm)} mm from the cut.`);
+
+/** A letter is about 0.6 of its height wide; the spine's arrow stands to the right. */
+const titleHeight = ({ width }: Page, { length }: string): number =>
+  Math.min(4, Math.round((width - 38) / (0.06 * length)) / 10);
 
 /** Along x, as pieces lie in a layout before they are turned. */
 function spine({ maxX, minY }: Page): string[] {

@@ -3,7 +3,7 @@ import { type HiddenBySheet, hiddenBySheets, isHidden } from './hidden.ts';
 import { userUnits } from './lengths.ts';
 import { combined, type Matrix, readTransform, unchanged } from './matrix.ts';
 import { deepest, mostElements, refusal } from './refusal.ts';
-import { shapeStrokes } from './shape-strokes.ts';
+import { isShare, shapeStrokes } from './shape-strokes.ts';
 import type { Stroke } from './stroke.ts';
 import { innerViewport } from './viewport.ts';
 
@@ -17,6 +17,8 @@ export interface Drawn {
   strokes: PlacedStroke[];
   /** elements of lettering, which have no curves of their own */
   texts: number;
+  /** shapes measured in per cent, such as a background */
+  shares: number;
 }
 
 const groups = new Set(['svg', 'g', 'a', 'switch']);
@@ -36,12 +38,14 @@ export function placedStrokes(root: Element): Drawn {
   const walk: Walk = {
     strokes: [],
     texts: 0,
+    shares: 0,
     byId: elementsById(root),
     hidden: hiddenBySheets(root),
     visited: 0,
   };
   root.children.forEach((child) => visit(walk, child, unchanged, 0));
-  return { strokes: walk.strokes, texts: walk.texts };
+  const { strokes, texts, shares } = walk;
+  return { strokes, texts, shares };
 }
 
 function elementsById(root: Element): Map<string, Element> {
@@ -67,7 +71,8 @@ function visit(walk: Walk, element: Element, outer: Matrix, depth: number): void
   else if (groups.has(element.name)) {
     const inner = element.name === 'svg' ? combined(matrix, innerPlace(element)) : matrix;
     element.children.forEach((child) => visit(walk, child, inner, depth + 1));
-  } else shapeStrokes(element).forEach((stroke) => walk.strokes.push({ stroke, matrix }));
+  } else if (isShare(element)) walk.shares += 1;
+  else shapeStrokes(element).forEach((stroke) => walk.strokes.push({ stroke, matrix }));
 }
 
 function placeOf({ attributes }: Element, outer: Matrix): Matrix {

@@ -39,6 +39,14 @@ export function shapeStrokes(element: Element): Stroke[] {
   return drawn[element.name]?.(element) ?? [];
 }
 
+const measures = ['x', 'y', 'width', 'height', 'rx', 'ry', 'cx', 'cy', 'r', 'x1', 'y1', 'x2', 'y2'];
+
+/** Whether a shape is a share of the whole picture, such as a background, and so of no size of its own. */
+export function isShare({ name, attributes }: Element): boolean {
+  if (drawn[name] === undefined) return false;
+  return measures.some((measure) => attributes.get(measure)?.trim().endsWith('%'));
+}
+
 const middleOf = (element: Element): Point => ({
   x: userUnits(element, 'cx'),
   y: userUnits(element, 'cy'),

@@ -12,7 +12,7 @@ interface Box {
 }
 
 /** @throws InvalidInput where there is one that cannot be read */
-export function viewBoxOf({ attributes }: Element): Box | null {
+function viewBoxOf({ attributes }: Element): Box | null {
   const text = attributes.get('viewBox');
   if (text === undefined) return null;
   const [x, y, width, height] = readNumbers(text) ?? [];

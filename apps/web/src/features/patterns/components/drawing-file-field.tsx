@@ -19,6 +19,8 @@ export function DrawingFileField({ fileName, refusal, onOpen }: DrawingFileField
   const { id, error: missing } = useField('definition.outline.points');
   const { error: wrongHoles } = useField('definition.outline.punched');
   const [over, setOver] = useState(false);
+  // What the browser itself says beside the button.
+  const [named, setNamed] = useState<string>();
   const error = refusal ?? missing ?? wrongHoles;
 
   function take(files: FileList | null) {
@@ -52,13 +54,17 @@ export function DrawingFileField({ fileName, refusal, onOpen }: DrawingFileField
           aria-invalid={error !== undefined}
           aria-describedby={describedBy(id, { help, error })}
           className="block w-full file:mr-3 file:rounded file:border file:border-edge file:bg-card file:px-3.5 file:py-1.5 file:font-semibold hover:file:bg-manila"
-          onChange={(event) => {
-            take(event.target.files);
+          onClick={(event) => {
             // The same file, mended, can be chosen again.
-            event.target.value = '';
+            event.currentTarget.value = '';
+            setNamed(undefined);
+          }}
+          onChange={(event) => {
+            setNamed(event.target.files?.[0]?.name);
+            take(event.target.files);
           }}
         />
-        {fileName !== undefined && (
+        {fileName !== undefined && fileName !== named && (
           <p role="status" className="mt-2 text-sm">
             Open: <strong className="font-semibold break-all">{fileName}</strong>
           </p>
