@@ -57,7 +57,19 @@ describe('the safe line', () => {
   it('of a round is a smaller round', () => {
     const points = safeLine(coaster, 3).flat();
     for (const { x, y } of points) expect(Math.hypot(x, y)).toBeCloseTo(44.5, 1);
-    expect(points.length).toBeGreaterThan(100);
+    expect(lengthOf(safeLine(coaster, 3))).toBeCloseTo(2 * Math.PI * 44.5, 0);
+  });
+
+  it('of a strap has no gaps', () => {
+    const { punched: _, ...whole } = strap;
+    expect(lengthOf(safeLine(whole, 3))).toBeCloseTo(2 * (194 + 24), 1);
+    expect(safeLine(whole, 3).flat().length).toBeLessThan(12);
+  });
+
+  it('is none, at once, where an outline is crinkled beyond sense', () => {
+    const crinkle = Array.from({ length: 2990 }, (_, at) => ({ x: at % 2 ? 400 : 0, y: at / 10 }));
+    const points = [...crinkle, ...corners([600, 299], [600, -5])];
+    expect(safeLine({ shape: 'polygon', points }, 3).flat().length).toBeLessThan(20_000);
   });
 
   it('of a strap goes round its hole', () => {
@@ -89,3 +101,12 @@ describe('the safe line', () => {
     }
   });
 });
+
+const lengthOf = (lines: Point[][]): number =>
+  lines.reduce((sum, line) => {
+    const apart = line.slice(1).map((to, at) => {
+      const from = line[at] as Point;
+      return Math.hypot(to.x - from.x, to.y - from.y);
+    });
+    return sum + apart.reduce((a, b) => a + b, 0);
+  }, 0);
