@@ -55,7 +55,8 @@ function mirroredPart({ ell: of, x, y, left, down }: Part): Part {
  * Every way of cutting a rectangle or an L in two, of which each is a rectangle or an L again, by a
  * line of up to three stretches. Source: the L-approach of E. G. Birgin, R. D. Lobato and R. Morabito,
  * "An effective recursive partitioning approach for the packing of identical rectangles in a
- * rectangle", Journal of the Operational Research Society 61 (2010); the cuts are derived anew.
+ * rectangle", Journal of the Operational Research Society 61 (2010), from memory; the cuts are derived
+ * anew.
  */
 export function* cutsOf(of: Ell, places: Places): Generator<Cut> {
   const cuts = isBox(of) ? boxCuts : ellCuts;
