@@ -19,6 +19,8 @@ const row = z.object({
   pieces: z.int(),
   /** Reckoned from its area and usable share, since it is not drawn. */
   estimated: z.boolean(),
+  /** Strips: the arrangement repeats after so much. */
+  repeatMm: z.string().nullable(),
   /** Strips: how long one of this width must be for the run. */
   lengthMm: z.string().nullable(),
   /** How many panels or lots the run needs; null where there are not enough. */

@@ -140,6 +140,16 @@ export const patternTemplatePdf = endpoint({
   file: 'application/pdf',
 });
 
+export const patternLayoutPdf = endpoint({
+  method: 'GET',
+  path: '/patterns/{id}/layout.pdf',
+  summary: 'How the pieces lie, to print and hang beside the press',
+  access: readers,
+  params: idParams,
+  reply: z.unknown(),
+  file: 'application/pdf',
+});
+
 export const addPattern = endpoint({
   method: 'POST',
   path: '/patterns',

@@ -10,7 +10,7 @@ import { invalid, notFound } from '../http/problem.ts';
 import { sideLayoutFor, type Worked } from '../modules/layouts/stored-layouts.ts';
 import { Lot } from '../modules/lots/lot.entity.ts';
 import { Pattern } from '../modules/patterns/pattern.entity.ts';
-import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
+import { definitionOf, latestVersion } from '../modules/patterns/pattern-versions.ts';
 
 /** A pattern laid on a lot, with the names that go with it. */
 export interface LaidOnLot {
@@ -37,11 +37,8 @@ export async function layOnLot(
   if (lot === null) throw notFound('lot');
   const pattern = await em.findOne(Pattern, patternId);
   if (pattern === null) throw fault('This pattern is not there. Choose one from the list.');
-  const version = await em.findOneOrFail(PatternVersion, {
-    patternId,
-    number: pattern.latestVersion,
-  });
-  const input = sideInputOf(lot, version.definition as PatternDefinition);
+  const definition = definitionOf(await latestVersion({ em }, pattern));
+  const input = sideInputOf(lot, definition);
   if (typeof input === 'string') throw fault(input);
   const worked = await sideLayoutFor(context, { ...input, search });
   return {

@@ -15,10 +15,13 @@ import {
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { priceText } from '../../http/decimal-text.ts';
-import { invalid, notFound } from '../../http/problem.ts';
+import { invalid } from '../../http/problem.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
-import { Pattern } from '../../modules/patterns/pattern.entity.ts';
-import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts';
+import {
+  definitionOf,
+  findPattern,
+  latestVersion,
+} from '../../modules/patterns/pattern-versions.ts';
 import { Press } from '../../modules/presses/press.entity.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { AdvisedSource } from './advised-source.ts';
@@ -39,13 +42,8 @@ export async function adviseCut(
   { good, panels }: BodyOf<typeof adviseCutEndpoint>,
 ): Promise<CutAdviceReply> {
   const em = context.orm.em.fork();
-  const pattern = await em.findOne(Pattern, patternId);
-  if (pattern === null) throw notFound('pattern');
-  const version = await em.findOneOrFail(PatternVersion, {
-    patternId,
-    number: pattern.latestVersion,
-  });
-  const definition = version.definition as PatternDefinition;
+  const pattern = await findPattern({ em }, patternId);
+  const definition = definitionOf(await latestVersion({ em }, pattern));
   const rules = rulesOf(definition);
   const workshop = await em.findOneOrFail(Workshop, 1);
   const leather = await em.findOneOrFail(Leather, definition.leatherId);
@@ -100,6 +98,7 @@ function rowOf(
     ...shown,
     ...advice,
     pieces: source.pieces,
+    repeatMm: periodMm === null ? null : periodMm.toFixed(1),
     lengthMm: needed === null || periodMm === null ? null : (needed * periodMm).toFixed(0),
     offcut: last > 0 && last < source.pieces ? (offcutAfter?.(last) ?? null) : null,
   };

@@ -8,7 +8,7 @@ import { sideInputOf } from '../lay-on-lot.ts';
 import type { AdvisedSource } from './advised-source.ts';
 
 /**
- * Each lot on the rack with the pieces that it gives: laid out where it is drawn, otherwise reckoned from what is
+ * Each lot on the rack that gives a piece, and how many: laid out where it is drawn, otherwise reckoned from what is
  * free of it, its usable share and the leather that each piece takes.
  * @param areaPerPieceMm2 in the middle of a good layout; null where none is known
  */
@@ -20,12 +20,13 @@ export async function lotSources(
   const em = context.orm.em.fork();
   const free = await freeLotsOf(em, definition.leatherId);
   const lots = await em.find(Lot, { id: { $in: free.map(({ lotId }) => lotId) } });
-  return Promise.all(
+  const sources = await Promise.all(
     free.flatMap((each) => {
       const lot = lots.find(({ id }) => id === each.lotId);
       return lot ? [lotSource(context, lot, each.freeAreaMm2, definition, areaPerPieceMm2)] : [];
     }),
   );
+  return sources.filter(({ source }) => source.pieces > 0);
 }
 
 async function lotSource(

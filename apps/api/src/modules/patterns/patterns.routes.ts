@@ -19,7 +19,7 @@ import { PatternVersion } from './pattern-version.entity.ts';
 import { definitionOf, findPattern, latestVersion } from './pattern-versions.ts';
 import type { Pattern } from './pattern.entity.ts';
 import { describePattern, listPatterns, summarise } from './patterns.repository.ts';
-import { templateRoutes } from './template.routes.ts';
+import { patternPaperRoutes } from './pattern-papers.routes.ts';
 
 export function patternRoutes(context: Context): Router {
   const router = Router();
@@ -51,7 +51,7 @@ export function patternRoutes(context: Context): Router {
     return { items: versions.map(toVersion) };
   });
 
-  templateRoutes(router, context);
+  patternPaperRoutes(router, context);
 
   serve(
     router,

@@ -206,3 +206,29 @@ describe('the template of a pattern', () => {
     }
   });
 });
+
+describe('a layout to print', () => {
+  it('is one sheet with a panel and its pieces, drawn to one scale', async () => {
+    const pattern = await added('Printed', {
+      outline: { shape: 'rectangle', widthMm: '60', heightMm: '40', cornerRadiusMm: '0' },
+      container: { form: 'panel', widthMm: '300', heightMm: '200' },
+      spacingMm: '0',
+      trimMm: '0',
+    });
+    const pdf = await fileOf(pattern.id, 'layout.pdf');
+    expect(pdf.subarray(0, 5).toString()).toBe('%PDF-');
+    expect(pageCount(pdf)).toBe(1);
+    expect(pattern.layout.pieces).toBe(25);
+  });
+
+  it('is not there for a hand count', async () => {
+    const handCount = { pieces: 21, widthMm: '279.4', heightMm: '330.2' };
+    const counted = { layoutBy: 'hand count' as const, handCount, outline: null, container: null };
+    const pattern = await added('By hand', counted);
+    const { body } = await shop
+      .as('maker')
+      .get(`/api/patterns/${pattern.id}/layout.pdf`)
+      .expect(404);
+    expect(body.detail).toContain('Draw its outline first');
+  });
+});

@@ -7,6 +7,7 @@ import { OutlinePicture } from '../../../components/outline-picture.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
+import { LayoutLink } from '../../../features/patterns/components/layout-link.tsx';
 import { LayoutDrawing } from '../../../features/patterns/components/layout-drawing.tsx';
 import { PutAwayButton } from '../../../features/patterns/components/put-away-button.tsx';
 import { TemplateLinks } from '../../../features/patterns/components/template-links.tsx';
@@ -47,6 +48,7 @@ export function Component() {
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <Card title="Layout" subtitle={layoutSubtitle(layout)}>
           <LayoutDrawing layout={layout} outlinePath={outlinePath} name={name} />
+          {layout.placements.length > 0 && <LayoutLink patternId={id} />}
         </Card>
         <div className="grid gap-5">
           <Card title="What it takes">

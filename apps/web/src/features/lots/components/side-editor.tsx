@@ -48,12 +48,16 @@ export function SideEditor({ lot, drawing, onDone }: SideEditorProps) {
   return (
     <div className="space-y-3">
       <div className="flex flex-wrap gap-2" role="group" aria-label="What to draw">
-        <Button aria-pressed={works === 'flaws'} onClick={() => setWorks('flaws')}>
-          Flaws
-        </Button>
-        <Button aria-pressed={works === 'edge'} onClick={() => setWorks('edge')}>
-          Edge
-        </Button>
+        {(['flaws', 'edge'] as const).map((part) => (
+          <Button
+            key={part}
+            aria-pressed={works === part}
+            className={works === part ? 'border-verdigris bg-verdigris-pale' : undefined}
+            onClick={() => setWorks(part)}
+          >
+            {part === 'flaws' ? 'Flaws' : 'Edge'}
+          </Button>
+        ))}
       </div>
       <p className="text-sm text-ink-soft">
         {works === 'flaws'

@@ -46,14 +46,17 @@ function ownPanel({ definition: { container } }: Pattern) {
 function PanelFields() {
   const { fields, append, remove } = useFieldArray({ name: 'panels' });
   return (
-    <fieldset>
+    <fieldset className="min-w-0">
       <legend className="mb-1 font-semibold">Panels on offer</legend>
       <p className="mb-3 text-sm text-ink-soft">
         Without a price a panel is reckoned by the leather’s price for its area.
       </p>
       <div className="space-y-5">
         {fields.map((field, at) => (
-          <div key={field.id} className="grid grid-cols-[1fr_1fr_auto] items-start gap-x-3 gap-y-2">
+          <div
+            key={field.id}
+            className="grid grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto] items-start gap-x-3 gap-y-2"
+          >
             <LengthField name={`panels.${at}.widthMm`} label="Width" whenEmpty="text" />
             <LengthField name={`panels.${at}.heightMm`} label="Height" whenEmpty="text" />
             <button

@@ -10,8 +10,8 @@ import {
   countText,
   lengthText,
   moneyText,
+  numberText,
   sizeText,
-  unitPriceText,
 } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 
@@ -84,7 +84,7 @@ function columnsFor({ lengthUnit, areaUnit, currency }: Workshop): Column<Row>[]
       id: 'pieces',
       header: 'Gives',
       value: (row) => row.pieces,
-      cell: (row) => `${row.estimated ? 'about ' : ''}${countText(row.pieces)}`,
+      cell: (row) => givesWords(row, lengthUnit),
       align: 'right',
     },
     {
@@ -112,7 +112,7 @@ function columnsFor({ lengthUnit, areaUnit, currency }: Workshop): Column<Row>[]
       id: 'each',
       header: 'Whole, each',
       value: (row) => row.perGoodPiece,
-      cell: (row) => orDash(row.perGoodPiece, unitPriceText),
+      cell: (row) => orDash(row.perGoodPiece, (price) => numberText(price, 3)),
       align: 'right',
     },
     {
@@ -137,6 +137,13 @@ function wordsOf(row: Row, unit: Workshop['lengthUnit']): string {
   if (row.kind === 'lot') return `Lot ${row.tag}`;
   if (row.kind === 'strip') return `Strip, ${lengthText(row.widthMm ?? '0', unit)} wide`;
   return `Panel, ${sizeText(row.widthMm ?? '0', row.heightMm ?? '0', unit)}`;
+}
+
+/** From one panel or lot; of a strip how many come again after how much. */
+function givesWords(row: Row, unit: Workshop['lengthUnit']): string {
+  const pieces = countText(row.pieces);
+  if (row.repeatMm !== null) return `${pieces} per ${lengthText(row.repeatMm, unit)}`;
+  return row.estimated ? `about ${pieces}` : pieces;
 }
 
 function neededWords(row: Row, unit: Workshop['lengthUnit']): string {
