@@ -1,11 +1,5 @@
 import { InvalidInput } from '../errors/domain-error.ts';
-import {
-  type DecimalText,
-  Exact,
-  readDecimal,
-  readWhole,
-  toPlaces,
-} from '../numbers/decimal-text.ts';
+import { type DecimalText, readDecimal, readWhole, toPlaces } from '../numbers/decimal-text.ts';
 
 /** Leather that the pieces could be cut from, bought or taken whole. */
 export interface CutSource {

@@ -2,7 +2,6 @@ import { outlinePath, type Layout } from '@hidewright/domain';
 import { outlineOf, type PatternDefinition } from '@hidewright/contract';
 import { Problem } from '../../http/problem.ts';
 import type { LayoutPaper } from '../../papers/layout-pdf.ts';
-import { printedNumber } from '../../papers/paper-text.ts';
 
 interface Laid {
   shopName: string;
@@ -51,9 +50,10 @@ function figuresOf(layout: Layout, { spacingMm, trimMm }: PatternDefinition) {
     container.form === 'panel'
       ? [container.widthMm, container.heightMm]
       : [container.lengthMm ?? 0, container.widthMm];
-  const mm = (value: number | string) => `${printedNumber(Number(value).toFixed(1), 0)} mm`;
+  const figure = (value: number | string) => String(Number(Number(value).toFixed(1)));
+  const mm = (value: number | string) => `${figure(value)} mm`;
   const lines: [string, string | null][] = [
-    [container.form, size.map((side) => printedNumber(String(side), 0)).join(' × ') + ' mm'],
+    [container.form, `${size.map(figure).join(' × ')} mm`],
     ['spacing', mm(spacingMm)],
     ['trim', mm(trimMm)],
     ['pitch', layout.pitchMm === null ? null : mm(layout.pitchMm)],
@@ -62,7 +62,7 @@ function figuresOf(layout: Layout, { spacingMm, trimMm }: PatternDefinition) {
     ['yield', layout.yieldPercent === null ? null : `${layout.yieldPercent} %`],
     ['strip for each piece', layout.mmPerPiece === null ? null : mm(layout.mmPerPiece)],
   ];
-  return lines.flatMap(([word, figure]) => (figure === null ? [] : [{ word, figure }]));
+  return lines.flatMap(([word, given]) => (given === null ? [] : [{ word, figure: given }]));
 }
 
 const countedByHand = () =>

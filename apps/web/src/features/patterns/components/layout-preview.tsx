@@ -42,7 +42,10 @@ export function LayoutPreview() {
           <Notice tone="attention">{answer.refusal}</Notice>
         )}
         {layout !== undefined && (
-          <div className={working ? 'opacity-60' : undefined}>
+          <div>
+            {working && !searching && (
+              <p className="mb-3 text-ink-soft">Laying the pieces out again …</p>
+            )}
             <LayoutDrawing layout={layout} outlinePath={drawnIn(source, path)} name={name} />
           </div>
         )}

@@ -1,0 +1,101 @@
+import { afterAll, beforeAll, expect } from 'vitest';
+import { closeBrowser, phone } from '../support/browser.ts';
+import { keyboardAlone } from '../support/hands.ts';
+import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import { signInAs } from '../support/steps.ts';
+import { expectAccessible, visit, walk } from '../support/walk.ts';
+
+let hidewright: Hidewright;
+beforeAll(async () => {
+  hidewright = await startHidewright();
+});
+afterAll(async () => {
+  await closeBrowser();
+  await hidewright.stop();
+});
+
+interface Named {
+  items: { id: number; tag: string; name: string; form: string; leatherName: string }[];
+}
+
+walk('a side is drawn with its flaws by keyboard and finger, and laid out', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'maker');
+  const read = await page.request.get(`${hidewright.url}/api/lots?onRack=yes&limit=200`);
+  const lots = ((await read.json()) as Named).items;
+  const side = lots.find(({ form, leatherName }) => form === 'side' && /russet/.test(leatherName));
+  await page.setViewportSize(phone);
+  await visit(page, `${hidewright.url}/stockroom/lots/${side?.id}`);
+  await keyboardAlone.press(page.getByRole('button', { name: 'Draw it' }));
+  await expectAccessible(page);
+
+  const canvas = page.getByRole('application');
+  await canvas.focus();
+  for (const key of ['Enter', 'Shift+ArrowRight', 'Enter', 'Shift+ArrowDown', 'Enter', 'Space']) {
+    await page.keyboard.press(key);
+  }
+  await expect.poll(() => page.getByText(/^Flaw 1, 50 × 50 mm/).count()).toBe(1);
+  const box = await canvas.boundingBox();
+  if (!box) throw new Error('The side is not to be seen.');
+  await page.mouse.move(box.x + box.width * 0.3, box.y + box.height * 0.3);
+  await page.mouse.down();
+  await page.mouse.move(box.x + box.width * 0.4, box.y + box.height * 0.3, { steps: 5 });
+  await page.mouse.move(box.x + box.width * 0.35, box.y + box.height * 0.45, { steps: 5 });
+  await page.mouse.up();
+  await page.getByText(/^Flaw 2/).waitFor();
+  await keyboardAlone.press(page.getByRole('button', { name: 'Edge' }));
+  await page.getByRole('button', { name: /^Corner 1:/ }).focus();
+  await page.keyboard.press('ArrowRight');
+  await expectAccessible(page);
+  await keyboardAlone.press(page.getByRole('button', { name: 'Save the drawing' }));
+
+  await page.getByRole('heading', { name: 'What it gives' }).waitFor();
+  await keyboardAlone.choose(page.getByLabel('Pattern', { exact: true }), 'Luggage tag with neck');
+  await keyboardAlone.press(page.getByRole('button', { name: 'Lay it out' }));
+  await page.getByText(/no layout gives more than/).waitFor({ timeout: 120_000 });
+  await page.getByRole('button', { name: 'Larger' }).click();
+  await expectAccessible(page);
+});
+
+walk('what a run is best cut from', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'owner');
+  const read = await page.request.get(`${hidewright.url}/api/patterns?limit=200`);
+  const patterns = ((await read.json()) as Named).items;
+  const coaster = patterns.find(({ name }) => name === 'Drinks coaster, round');
+  await visit(page, `${hidewright.url}/pattern-room/patterns/${coaster?.id}`);
+  await page.getByRole('heading', { name: 'At the press' }).waitFor();
+  await page.getByRole('link', { name: 'What to cut from' }).click();
+  await page.getByLabel('Good pieces needed').fill('100');
+  await page.getByRole('button', { name: 'Compare' }).click();
+  await page.getByText('cheapest', { exact: true }).waitFor({ timeout: 120_000 });
+  expect(await page.getByRole('row', { name: /^Strip/ }).count()).toBeGreaterThan(0);
+  await page.getByText(/^Take/).first().waitFor();
+  await expectAccessible(page);
+  await visit(page, `${hidewright.url}/pattern-room/presses`);
+  await page
+    .getByRole('button', { name: /^Change/ })
+    .first()
+    .click();
+  const dialog = page.getByRole('dialog');
+  await dialog.getByLabel(/^Throat/).fill('280');
+  await dialog.getByRole('button', { name: 'Save' }).click();
+  await page.getByText('Clicker by the window is saved.').first().waitFor();
+  await expectAccessible(page);
+});
+
+walk(
+  'more pieces than rows give are looked for, and the search can be stopped',
+  async ({ page }) => {
+    await signInAs(page, hidewright.url, 'owner');
+    const read = await page.request.get(`${hidewright.url}/api/patterns?limit=200`);
+    const patterns = ((await read.json()) as Named).items;
+    const tag = patterns.find(({ name }) => name === 'Luggage tag with neck');
+    await visit(page, `${hidewright.url}/pattern-room/patterns/${tag?.id}/change`);
+    await page
+      .getByText(/from a panel/)
+      .first()
+      .waitFor({ timeout: 60_000 });
+    await page.getByRole('radio', { name: /As many as can be found/ }).check();
+    await expect.poll(() => page.locator('[aria-busy=true]').count(), { timeout: 60_000 }).toBe(0);
+    await expectAccessible(page);
+  },
+);
