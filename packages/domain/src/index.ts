@@ -38,6 +38,8 @@ export { adviseCut, adviseLots } from './yield/advise.ts';
 export type { CutAdvice, CutSource, RackLot } from './yield/advise.ts';
 export { largestOffcut } from './yield/offcut.ts';
 export { placedRing } from './yield/placed-ring.ts';
+export { stripCuts } from './yield/strip-cuts.ts';
+export type { StripCuts } from './yield/strip-cuts.ts';
 export type { Watch } from './yield/lie.ts';
 export { handCount } from './yield/hand-count.ts';
 export { layoutInputKey } from './yield/layout-input-key.ts';

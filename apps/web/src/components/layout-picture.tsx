@@ -1,4 +1,4 @@
-import type { DrawnSide } from '@hidewright/domain';
+import type { DrawnSide, StripCuts } from '@hidewright/domain';
 import { useId } from 'react';
 import { lengthFigure, lengthUnits } from '../lib/units.ts';
 import { useWorkshop } from '../lib/workshop.tsx';
@@ -22,8 +22,8 @@ interface LayoutPictureProps {
   heightMm: number;
   /** A side as it was drawn, where it is no rectangle. */
   side?: DrawnSide | undefined;
-  /** What goes back on the rack. */
-  offcut?: { x: number; y: number; widthMm: number; heightMm: number } | undefined;
+  /** Straight cuts that part it into strips for the press. */
+  cuts?: StripCuts | undefined;
   /** How many pieces the spoilage allowance will cost: the last ones are hatched. */
   allowance?: number | undefined;
   /** Along which side the backbone ran. */
@@ -43,7 +43,7 @@ export function LayoutPicture(props: LayoutPictureProps) {
     allowance = 0,
     spine = 'across',
     side,
-    offcut,
+    cuts,
     title,
   } = props;
   const { lengthUnit } = useWorkshop();
@@ -84,18 +84,6 @@ export function LayoutPicture(props: LayoutPictureProps) {
               vectorEffect="non-scaling-stroke"
             />
           )}
-          {offcut && (
-            <rect
-              x={offcut.x}
-              y={offcut.y}
-              width={offcut.widthMm}
-              height={offcut.heightMm}
-              className="fill-verdigris-pale stroke-verdigris"
-              strokeWidth={1.5}
-              strokeDasharray="5 3"
-              vectorEffect="non-scaling-stroke"
-            />
-          )}
           {placements.map((placement, index) => (
             <LayoutPiece
               key={index}
@@ -106,6 +94,7 @@ export function LayoutPicture(props: LayoutPictureProps) {
               box={box}
             />
           ))}
+          {cuts && <CutLines cuts={cuts} widthMm={widthMm} heightMm={heightMm} />}
         </svg>
       </ZoomFrame>
       <figcaption className="mt-2 flex flex-wrap justify-between gap-x-6 text-ink-soft">
@@ -113,6 +102,27 @@ export function LayoutPicture(props: LayoutPictureProps) {
         <SpineArrow spine={spine} />
       </figcaption>
     </figure>
+  );
+}
+
+interface CutLinesProps {
+  cuts: StripCuts;
+  widthMm: number;
+  heightMm: number;
+}
+
+function CutLines({ cuts, widthMm, heightMm }: CutLinesProps) {
+  const path = cuts.at.map((at) =>
+    cuts.along === 'width' ? `M 0 ${at} H ${widthMm}` : `M ${at} 0 V ${heightMm}`,
+  );
+  return (
+    <path
+      d={path.join(' ')}
+      className="fill-none stroke-ink"
+      strokeWidth={2}
+      strokeDasharray="9 4"
+      vectorEffect="non-scaling-stroke"
+    />
   );
 }
 

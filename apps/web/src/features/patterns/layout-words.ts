@@ -1,5 +1,6 @@
 import type { LayoutReply } from '@hidewright/contract';
 import type { KeyFigure } from '../../components/key-figures.tsx';
+import { rowFigures } from '../../components/row-figures.ts';
 import { areaText, countText, lengthText, percentText, sizeText } from '../../lib/formatting.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
@@ -64,25 +65,11 @@ export function layoutFigures(layout: LayoutReply, { areaUnit, lengthUnit }: Uni
       figure: areaText(layout.areaPerPieceMm2, areaUnit, 4),
       note: 'waste included',
     },
-    layout.pitchMm !== null &&
-      layout.rowStepMm !== null && {
-        word: 'pitch · row step',
-        figure: `${mm(layout.pitchMm)} · ${mm(layout.rowStepMm)}`,
-        note:
-          layout.shiftMm !== null &&
-          layout.shiftMm > 0 &&
-          `each row shifted by ${mm(layout.shiftMm)}`,
-      },
     layout.mmPerPiece !== null && {
       word: 'strip for each piece',
       figure: mm(layout.mmPerPiece),
       note: 'in the middle of a long strip',
     },
-    layout.period !== null && {
-      word: 'pull the strip',
-      figure: mm(layout.period.mm),
-      note: `for every ${countText(layout.period.pieces)}`,
-    },
   ];
-  return figures.filter((figure) => figure !== false);
+  return [...figures.filter((figure) => figure !== false), ...rowFigures(layout, lengthUnit)];
 }

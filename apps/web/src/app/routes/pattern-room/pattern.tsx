@@ -8,7 +8,6 @@ import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { LayoutLink } from '../../../features/patterns/components/layout-link.tsx';
-import { LayoutDrawing } from '../../../features/patterns/components/layout-drawing.tsx';
 import { PutAwayButton } from '../../../features/patterns/components/put-away-button.tsx';
 import { TemplateLinks } from '../../../features/patterns/components/template-links.tsx';
 import { VersionsList } from '../../../features/patterns/components/versions-list.tsx';
@@ -20,6 +19,7 @@ import { pressesQuery } from '../../../features/presses/presses.queries.ts';
 import { ToolsTable } from '../../../features/tools/components/tools-table.tsx';
 import { toolsQuery } from '../../../features/tools/tools.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
+import { LaidForPress } from './laid-for-press.tsx';
 import { PressCard } from './press-card.tsx';
 
 export async function loader({ params }: LoaderFunctionArgs) {
@@ -47,7 +47,7 @@ export function Component() {
       />
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <Card title="Layout" subtitle={layoutSubtitle(layout)}>
-          <LayoutDrawing layout={layout} outlinePath={outlinePath} name={name} />
+          <LaidForPress pattern={pattern} />
           {layout.placements.length > 0 && <LayoutLink patternId={id} />}
         </Card>
         <div className="grid gap-5">

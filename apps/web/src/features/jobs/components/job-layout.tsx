@@ -1,5 +1,7 @@
 import type { Job } from '@hidewright/contract';
 import { Card } from '../../../components/card.tsx';
+import { KeyFigures } from '../../../components/key-figures.tsx';
+import { rowFigures } from '../../../components/row-figures.ts';
 import { LayoutPicture } from '../../../components/layout-picture.tsx';
 import { sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -20,13 +22,18 @@ export function JobLayout({ job }: { job: Job }) {
   return (
     <Card title="Layout" subtitle={`${layout.pieces} from ${size}, ${from}`}>
       {outlinePath !== null && layout.placements.length > 0 ? (
-        <LayoutPicture
-          outlinePath={outlinePath}
-          placements={layout.placements}
-          widthMm={width}
-          heightMm={height}
-          title={`Layout of ${job.patternName}`}
-        />
+        <>
+          <LayoutPicture
+            outlinePath={outlinePath}
+            placements={layout.placements}
+            widthMm={width}
+            heightMm={height}
+            title={`Layout of ${job.patternName}`}
+          />
+          <div className="mt-4">
+            <KeyFigures figures={rowFigures(layout, lengthUnit)} />
+          </div>
+        </>
       ) : (
         <p className="text-ink-soft">Counted by hand, so there is no picture of it.</p>
       )}

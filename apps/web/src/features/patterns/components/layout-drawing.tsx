@@ -1,4 +1,5 @@
 import type { LayoutReply } from '@hidewright/contract';
+import type { StripCuts } from '@hidewright/domain';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { LayoutPicture } from '../../../components/layout-picture.tsx';
 import { Notice } from '../../../components/notice.tsx';
@@ -9,12 +10,14 @@ interface LayoutDrawingProps {
   layout: LayoutReply;
   /** None where a hand count stands in for a drawing. */
   outlinePath: string | null;
+  /** Straight cuts for the press, where the panel does not go in whole. */
+  cuts?: StripCuts | undefined;
   /** What lies there: "Round coaster". */
   name: string;
 }
 
 /** How the pieces lie, to scale, and the figures below. */
-export function LayoutDrawing({ layout, outlinePath, name }: LayoutDrawingProps) {
+export function LayoutDrawing({ layout, outlinePath, name, cuts }: LayoutDrawingProps) {
   const workshop = useWorkshop();
   const { container } = layout;
   const heightMm = container.form === 'panel' ? container.heightMm : container.widthMm;
@@ -30,6 +33,7 @@ export function LayoutDrawing({ layout, outlinePath, name }: LayoutDrawingProps)
           placements={layout.placements}
           widthMm={widthMm}
           heightMm={heightMm}
+          cuts={cuts}
         />
       )}
       <KeyFigures figures={layoutFigures(layout, workshop)} />

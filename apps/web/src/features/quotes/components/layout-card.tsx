@@ -3,7 +3,8 @@ import type { BreakNumbers } from '@hidewright/domain';
 import { Card } from '../../../components/card.tsx';
 import { KeyFigures, type KeyFigure } from '../../../components/key-figures.tsx';
 import { LayoutPicture } from '../../../components/layout-picture.tsx';
-import { countText, lengthText, percentText } from '../../../lib/formatting.ts';
+import { countText, percentText } from '../../../lib/formatting.ts';
+import { rowFigures } from '../../../components/row-figures.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 type Layout = Quote['layout'];
@@ -66,12 +67,7 @@ function Figures({ layout, rung }: Pick<LayoutCardProps, 'layout' | 'rung'>) {
           : `at most ${countText(layout.boundPieces)} could fit`,
     });
   }
-  if (layout.pitchMm !== null && layout.rowStepMm !== null) {
-    const [pitch, step] = [layout.pitchMm, layout.rowStepMm].map((mm) =>
-      lengthText(String(mm), lengthUnit),
-    );
-    figures.push({ word: 'pitch · row step', figure: `${pitch} · ${step}` });
-  }
+  figures.push(...rowFigures(layout, lengthUnit));
   return <KeyFigures figures={figures} />;
 }
 
