@@ -2,7 +2,7 @@ import { areaPerPiece, type Crystal } from './crystal.ts';
 import { deepestConflict } from './crystal-faults.ts';
 import { PhaseSearch, type Phase } from './phase.ts';
 import type { NestPlacement, Ring } from './problem.ts';
-import { turned } from './ring.ts';
+import { ringBounds, turned } from './ring.ts';
 import type { Room } from './room.ts';
 import type { NoFitPair } from './row-frame.ts';
 
@@ -32,6 +32,7 @@ export class Candidates {
     if (!(areaPerPiece(crystal) > 1e-6)) return;
     const free = this.#freeFor(crystal, rot);
     if (free.every((rings) => rings.length === 0)) return;
+    if (mostInBox(crystal, free) <= this.most) return;
     const phase = new PhaseSearch(crystal, free).best(tries, lines);
     if (phase.count <= this.most || !this.#canBeCut(crystal, rot)) return;
     this.#kept.unshift({ crystal, rot, phase });
@@ -62,6 +63,23 @@ export class Candidates {
     const noFit = { same: lying(same), turned: halfTurned && lying(halfTurned) };
     return deepestConflict(crystal, noFit) < 1e-5;
   }
+}
+
+/**
+ * For rows along an edge of a box, the most pieces that any way of laying the pattern could give;
+ * otherwise no bound.
+ */
+function mostInBox({ along, across, members }: Crystal, free: readonly (readonly Ring[])[]): number {
+  const lying = Math.abs(along.y) < 1e-9;
+  if (!lying && Math.abs(along.x) > 1e-9) return Infinity;
+  return members.reduce((sum, _, member) => {
+    const rings = free[member] ?? [];
+    if (rings.length !== 1 || rings[0]?.length !== 4) return rings.length === 0 ? sum : Infinity;
+    const { minX, minY, maxX, maxY } = ringBounds(rings);
+    const [long, wide] = lying ? [maxX - minX, maxY - minY] : [maxY - minY, maxX - minX];
+    const [pitch, step] = lying ? [along.x, across.y] : [along.y, across.x];
+    return sum + Math.floor(1 + long / Math.abs(pitch)) * Math.floor(1 + wide / Math.abs(step));
+  }, 0);
 }
 
 /** Within [0, 360). */

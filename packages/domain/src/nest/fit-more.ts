@@ -15,7 +15,8 @@ export interface Seed {
 }
 
 /** By how much of a piece's size a panel is thought larger, to see which patterns all but give more. */
-const growths = [0.01, 0.02, 0.04, 0.07];
+const growths = [0.01, 0.02, 0.04];
+const largestGrowth = 0.07;
 const mostTried = 12;
 
 /** Patterns that would give more on a slightly larger panel, changed so that they do on this one. */
@@ -60,19 +61,18 @@ function nearMisses(most: number, shape: Shape, room: Room, pool: readonly Seed[
   const densest = [...pool].sort((a, b) => areaPerPiece(a.crystal) - areaPerPiece(b.crystal));
   const seen = new Set<string>();
   const found = densest.slice(0, 150).flatMap((seed) => {
-    for (const growth of growths) {
-      const free = seed.crystal.members.map(({ turn }) =>
-        room.free(fullTurn(seed.rot + turn)).map((ring) => largerBox(ring, growth * size)),
-      );
-      const search = new PhaseSearch(seed.crystal, free);
-      const phase = search.best(6);
-      if (phase.count <= most) continue;
-      const key = `${growth} ${phase.count} ${areaPerPiece(seed.crystal).toFixed(1)}`;
-      if (seen.has(key)) return [];
-      seen.add(key);
-      return [{ ...seed, search, phase, count: phase.count, growth }];
-    }
-    return [];
+    const free = seed.crystal.members.map(({ turn }) => room.free(fullTurn(seed.rot + turn)));
+    const within = (growth: number) => {
+      const larger = free.map((rings) => rings.map((ring) => largerBox(ring, growth * size)));
+      const search = new PhaseSearch(seed.crystal, larger);
+      const phase = search.best(4);
+      return { ...seed, search, phase, count: phase.count, growth };
+    };
+    const widest = within(largestGrowth);
+    const key = `${widest.count} ${areaPerPiece(seed.crystal).toFixed(1)}`;
+    if (widest.count <= most || seen.has(key)) return [];
+    seen.add(key);
+    return [growths.map(within).find(({ count }) => count > most) ?? widest];
   });
   return found.sort((a, b) => a.growth - b.growth || b.count - a.count).slice(0, mostTried);
 }

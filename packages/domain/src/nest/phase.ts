@@ -22,6 +22,10 @@ type Edges = Float64Array;
 export class PhaseSearch {
   readonly #members: readonly Edges[];
   readonly #crystal: Crystal;
+  /** whether the steps from along to across turn clockwise, which turns the room's rings round */
+  readonly #leftHanded: boolean;
+  readonly #starts: Float64Array;
+  readonly #ends: Float64Array;
 
   /** @param free for each of the pattern's members, the region that its origin may take */
   constructor(crystal: Crystal, free: readonly (readonly Ring[])[]) {
@@ -29,6 +33,11 @@ export class PhaseSearch {
     this.#members = crystal.members.map(({ at }, member) =>
       edgesOf(crystal, free[member] ?? [], at.x, at.y),
     );
+    const { along, across } = crystal;
+    this.#leftHanded = along.x * across.y - along.y * across.x < 0;
+    const most = this.#members.reduce((sum, edges) => sum + crossingsOf(edges), 0);
+    this.#starts = new Float64Array(most);
+    this.#ends = new Float64Array(most);
   }
 
   /**
@@ -87,18 +96,33 @@ export class PhaseSearch {
     });
   }
 
+  /** Every crossing to the right adds all pieces up to it, every one to the left takes them away. */
   #alongLine(v: number): Phase {
-    const starts: number[] = [];
-    const ends: number[] = [];
-    let base = 0;
+    const [starts, ends] = [this.#starts, this.#ends];
+    let [base, left, right] = [0, 0, 0];
     for (const edges of this.#members) {
-      for (const [, from, to] of spans(edges, v)) {
-        base += Math.floor(to) - Math.ceil(from) + 1;
-        if (from > Math.floor(from)) starts.push(from - Math.floor(from));
-        ends.push(to - Math.floor(to));
+      for (let at = 0; at < edges.length; at += 4) {
+        const [v0, v1] = [edges[at + 1] as number, edges[at + 3] as number];
+        const up = v1 > v0;
+        const high = up ? v1 : v0;
+        let line = Math.ceil((up ? v0 : v1) - v) + v;
+        if (line >= high) continue;
+        const u0 = edges[at] as number;
+        const slope = ((edges[at + 2] as number) - u0) / (v1 - v0);
+        for (; line < high; line += 1) {
+          const u = u0 + (line - v0) * slope;
+          const whole = Math.floor(u);
+          if (up === this.#leftHanded) {
+            base -= u > whole ? whole : whole - 1;
+            if (u > whole) starts[left++] = u - whole;
+          } else {
+            base += whole;
+            ends[right++] = u - whole;
+          }
+        }
       }
     }
-    const { gain, u } = mostAtOnce(starts, ends);
+    const { gain, u } = mostAtOnce(starts.subarray(0, left).sort(), ends.subarray(0, right).sort());
     return { count: base + gain, u, v };
   }
 }
@@ -107,11 +131,8 @@ export class PhaseSearch {
 const nudge = 1e-9;
 
 /** After each start one more, past each end one fewer: where is the most, from 0 to 1. */
-function mostAtOnce(starts: number[], ends: number[]): { gain: number; u: number } {
-  starts.sort((a, b) => a - b);
-  ends.sort((a, b) => a - b);
-  let [gain, best, u] = [0, 0, Math.min(1, ends[0] ?? 1) / 2];
-  if ((starts[0] ?? 1) < u * 2) u = (starts[0] as number) / 2;
+function mostAtOnce(starts: Float64Array, ends: Float64Array): { gain: number; u: number } {
+  let [gain, best, u] = [0, 0, Math.min(1, ends[0] ?? 1, starts[0] ?? 1) / 2];
   let passed = 0;
   for (let at = 0; at < starts.length; at += 1) {
     const start = starts[at] as number;
@@ -122,8 +143,7 @@ function mostAtOnce(starts: number[], ends: number[]): { gain: number; u: number
     gain += 1;
     if (gain > best) {
       best = gain;
-      const until = Math.min(ends[passed] ?? 1, 1);
-      u = (start + Math.max(start, until)) / 2;
+      u = (start + Math.max(start, Math.min(ends[passed] ?? 1, starts[at + 1] ?? 1))) / 2;
     }
   }
   return { gain: best, u };
@@ -147,6 +167,15 @@ function edgesOf({ along, across }: Crystal, rings: readonly Ring[], x: number, 
     }
   }
   return Float64Array.from(edges);
+}
+
+/** At most so many times whole lines cross the edges. */
+function crossingsOf(edges: Edges): number {
+  let sum = 0;
+  for (let at = 0; at < edges.length; at += 4) {
+    sum += Math.ceil(Math.abs((edges[at + 3] as number) - (edges[at + 1] as number))) + 1;
+  }
+  return sum;
 }
 
 /** The stretches of the lines v, v + 1, … that lie in the room: line, from u, to u. */

@@ -26,7 +26,7 @@ export function panelCandidates(
     candidates.consider(seed.crystal, seed.rot, lines);
     pool.push(seed);
   };
-  const bases = basesOf(problem.rotations, shape.symmetrical) ?? freeBases(patterns);
+  const bases = basesOf(problem.rotations, shape.symmetrical) ?? freeBases(patterns, shape);
   const effort = effortFor(problem.rotations);
   for (const base of bases) {
     for (const axis of [0, 90]) {

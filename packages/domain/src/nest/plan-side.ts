@@ -2,6 +2,7 @@ import { Candidates } from './candidates.ts';
 import { areaPerPiece, type Crystal, turnedCrystal } from './crystal.ts';
 import { clearances } from './crystal-wishes.ts';
 import type { Pattern } from './dense-patterns.ts';
+import { rotationPeriod } from './free-bases.ts';
 import type { NestProblem } from './problem.ts';
 import type { Room } from './room.ts';
 import { seeded } from './seeded.ts';
@@ -11,6 +12,7 @@ import { tightened } from './tighten.ts';
 /** Lines of a pattern to look along at first, and for what has given most. */
 const [firstTries, lastTries] = [40, 240];
 const variations = 40;
+const angles = 16;
 /** How strongly variations are pulled away from the densest, in shares of a piece's size. */
 const pulls = [0.03, 0.1, 0.2];
 
@@ -22,7 +24,7 @@ export function sideCandidates(
   patterns: readonly Pattern[],
 ): Candidates {
   const candidates = new Candidates(room, shape.noFit);
-  const bases = basesOf(rotations, shape.symmetrical) ?? anyAngle();
+  const bases = basesOf(rotations, shape.symmetrical) ?? anyAngle(shape);
   const consider = (crystal: Crystal, { rot, halfTurns }: Base) => {
     if (crystal.members.length > 1 && !halfTurns) return;
     candidates.consider(turnedCrystal(crystal, rot), rot, firstTries);
@@ -41,8 +43,14 @@ export function sideCandidates(
   return candidates;
 }
 
-const anyAngle = (): Base[] =>
-  Array.from({ length: 18 }, (_, at) => ({ rot: at * 10, halfTurns: true }));
+/** Angles spread over those that differ for this outline. */
+function anyAngle(shape: Shape): Base[] {
+  const period = rotationPeriod(shape);
+  return Array.from({ length: angles }, (_, at) => ({
+    rot: (at * period) / angles,
+    halfTurns: !shape.symmetrical,
+  }));
+}
 
 /** Other patterns all but as dense: the shape of the side decides which of them gives most. */
 function varied(shape: Shape, patterns: readonly Pattern[], count: number): Crystal[] {
@@ -52,7 +60,7 @@ function varied(shape: Shape, patterns: readonly Pattern[], count: number): Crys
   if (dense.length === 0) return [];
   return Array.from({ length: count }, (_, at) => {
     const { crystal } = dense[at % Math.min(6, dense.length)] as Pattern;
-    const strength = (pulls[at % pulls.length] as number) * Math.sqrt(areaPerPiece(crystal));
+    const strength = (pulls[Math.floor(at / 6) % pulls.length] as number) * Math.sqrt(areaPerPiece(crystal));
     const pull = [0, 1, 2, 3].map(() => (2 * chance() - 1) * strength);
     return tightened(crystal, clear, pull);
   });

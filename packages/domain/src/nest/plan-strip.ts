@@ -18,7 +18,7 @@ export function bestStripCell(
   shape: Shape,
   patterns: readonly Pattern[],
 ): StripCell | null {
-  const bases = basesOf(problem.rotations, shape.symmetrical) ?? freeBases(patterns);
+  const bases = basesOf(problem.rotations, shape.symmetrical) ?? freeBases(patterns, shape);
   const seeds = bases.flatMap((base) => {
     const rules = rulesFor(problem, shape, base);
     return rules ? seedsFor(shape, base, rules).map((cell) => ({ cell, rules })) : [];
