@@ -50,7 +50,7 @@ export function planRegular(problem: NestProblem): RegularPlan {
   return { ...nothing, planeDensity };
 }
 
-const effort = { seeds: 24, kept: 8 };
+const effort = { seeds: 48, kept: 12 };
 
 function patternsFor({ rotations }: NestProblem, shape: Shape): Pattern[] {
   const bases = basesOf(rotations, shape.symmetrical);

@@ -10,8 +10,8 @@ import { type Base, basesOf, type Shape } from './shape.ts';
 import { tightened } from './tighten.ts';
 
 /** Lines of a pattern to look along at first, and for what has given most. */
-const [firstTries, lastTries] = [40, 240];
-const variations = 40;
+const [firstTries, lastTries] = [24, 240];
+const variations = 80;
 const angles = 16;
 /** How strongly variations are pulled away from the densest, in shares of a piece's size. */
 const pulls = [0.03, 0.1, 0.2];
@@ -32,9 +32,7 @@ export function sideCandidates(
   for (const base of bases) for (const { crystal } of patterns) consider(crystal, base);
   const perBase = Math.ceil(variations / bases.length);
   for (const base of bases) {
-    const allowed = patterns.filter(
-      ({ crystal }) => base.halfTurns || crystal.members.length === 1,
-    );
+    const allowed = patterns.filter(({ crystal }) => base.halfTurns || crystal.members.length === 1);
     for (const crystal of varied(shape, allowed, perBase)) consider(crystal, base);
   }
   for (const { crystal, rot } of candidates.kept.slice(0, 2)) {
@@ -55,13 +53,14 @@ function anyAngle(shape: Shape): Base[] {
 /** Other patterns all but as dense: the shape of the side decides which of them gives most. */
 function varied(shape: Shape, patterns: readonly Pattern[], count: number): Crystal[] {
   const clear = clearances(shape.noFit);
-  const chance = seeded(1);
+  const chance = seeded(3);
   const dense = patterns.filter(({ areaMm2 }) => areaMm2 < 1.04 * (patterns[0]?.areaMm2 ?? 0));
   if (dense.length === 0) return [];
   return Array.from({ length: count }, (_, at) => {
-    const { crystal } = dense[at % Math.min(6, dense.length)] as Pattern;
-    const strength = (pulls[Math.floor(at / 6) % pulls.length] as number) * Math.sqrt(areaPerPiece(crystal));
+    // The densest first and most often.
+    const { crystal } = dense[Math.floor(chance() ** 2 * Math.min(6, dense.length))] as Pattern;
+    const strength = (pulls[at % pulls.length] as number) * Math.sqrt(areaPerPiece(crystal));
     const pull = [0, 1, 2, 3].map(() => (2 * chance() - 1) * strength);
-    return tightened(crystal, clear, pull);
+    return tightened(crystal, clear, pull, 1e-5);
   });
 }

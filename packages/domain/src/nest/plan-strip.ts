@@ -7,6 +7,7 @@ import { rowFrame } from './row-frame.ts';
 import { type Base, basesOf, type Shape } from './shape.ts';
 import { type StripCell, shortened, stripEdges, type StripRules } from './strip-cell.ts';
 import { rowsAcross, rowsAlong } from './strip-seeds.ts';
+import { unitsAlong } from './strip-units.ts';
 import { freeBases } from './free-bases.ts';
 
 /** How many of the most promising patterns are shortened. */
@@ -24,7 +25,7 @@ export function bestStripCell(
     return rules ? seedsFor(shape, base, rules).map((cell) => ({ cell, rules })) : [];
   });
   seeds.sort((a, b) => perPiece(a.cell) - perPiece(b.cell));
-  const shorter = distinct(seeds)
+  const shorter = [...distinct(seeds), ...distinct(seeds).slice(0, 4).flatMap(doubled)]
     .map(({ cell, rules }) => shortened(cell, rules))
     .sort((a, b) => perPiece(a) - perPiece(b));
   return (
@@ -55,6 +56,7 @@ function seedsFor(shape: Shape, { rot, halfTurns }: Base, rules: StripRules): St
   const noFit = halfTurns ? shape.noFit : { ...shape.noFit, turned: null };
   return [
     ...rowsAlong(rowFrame(noFit, -rot), rules),
+    ...unitsAlong(rowFrame(noFit, -rot), rules),
     ...rowsAcross(rowFrame(noFit, 90 - rot), rules),
   ].filter(({ periodMm, pieces }) => pieces.length > 0 && periodMm > 1e-6);
 }
@@ -74,11 +76,31 @@ function distinct(seeds: readonly Seed[]): Seed[] {
       ({ cell, rules }) =>
         rules.rot === seed.rules.rot &&
         cell.pieces.length === seed.cell.pieces.length &&
+        halfTurnedIn(cell, rules) === halfTurnedIn(seed.cell, rules) &&
         Math.abs(cell.periodMm - seed.cell.periodMm) < 0.01 * cell.periodMm,
     );
     if (!alike) chosen.push(seed);
   }
   return chosen;
+}
+
+const halfTurnedIn = ({ pieces }: StripCell, { rot }: StripRules): number =>
+  pieces.filter((piece) => piece.rot !== rot).length;
+
+/**
+ * Two repeats, the second a little farther on and farther up the strip: then a piece need not lie
+ * straight behind another.
+ */
+function doubled({ cell, rules }: Seed): Seed[] {
+  const { periodMm, pieces } = cell;
+  if (pieces.length > 8) return [];
+  const apart = periodMm * 1.03;
+  const lift = (rules.same.bounds.maxY - rules.same.bounds.minY) / 25;
+  const raised = pieces.map(({ x, y, rot }) => {
+    const [, most] = rot === rules.rot ? rules.upright : rules.halfTurned;
+    return { x: x + apart, y: Math.min(most, y + lift), rot };
+  });
+  return [{ rules, cell: { periodMm: 2 * apart, pieces: [...pieces, ...raised] } }];
 }
 
 function isSound(problem: NestProblem, cell: StripCell): boolean {

@@ -1,4 +1,5 @@
 import { grown } from './clip.ts';
+import { blunted } from './blunted.ts';
 import { minkowskiSum } from './convolution.ts';
 import type { Ring, Rotations } from './problem.ts';
 import { cornerAt, counterClockwise, inset, mirroredThroughOrigin, signedArea } from './ring.ts';
@@ -21,6 +22,9 @@ export interface Shape {
 /** What a spacing may fall short by, in mm: a hundredth of what a check allows. */
 const gapShortfall = 1e-5;
 
+/** How far no-fit polygons may go beyond what is needed, in shares of a piece's size. */
+const bluntness = 1e-5;
+
 export function shapeOf(outline: Ring, gap: number): Shape {
   const ring = counterClockwise(outline);
   const areaMm2 = signedArea(ring);
@@ -28,7 +32,9 @@ export function shapeOf(outline: Ring, gap: number): Shape {
   const drawnIn = inset(ring, slack);
   const first = gap > 0 ? ring : drawnIn;
   const spaced = (other: Ring) =>
-    grown(minkowskiSum(first, other), gap > 0 ? Math.max(0, gap - gapShortfall) : 0);
+    grown(minkowskiSum(first, other), gap > 0 ? Math.max(0, gap - gapShortfall) : 0).map((part) =>
+      blunted(part, bluntness * Math.sqrt(areaMm2)),
+    );
   const symmetrical = isSymmetrical(ring);
   const same = spaced(mirroredThroughOrigin(ring));
   return {

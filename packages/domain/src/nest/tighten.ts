@@ -8,11 +8,13 @@ const mostRounds = 60;
  * Moves a pattern's repeats and its pieces so that the area per piece falls, by linear programmes
  * in which every neighbour stays within a convex free cell: each step can be cut.
  * @param pull what else is to be lessened: mm² per mm of the steps along x, y and across x, y
+ * @param precision in shares of a piece's size
  */
 export function tightened(
   crystal: Crystal,
   clear: Clearances,
   pull: readonly number[] = [0, 0, 0, 0],
+  precision = 1e-8,
 ): Crystal {
   const worth = (other: Crystal) =>
     areaPerPiece(other) * other.members.length + pulled(other, pull);
@@ -20,7 +22,7 @@ export function tightened(
   const { bounds } = clear.same;
   const size = Math.hypot(bounds.maxX, bounds.maxY);
   let reach = size / 12;
-  for (let round = 0; round < mostRounds && reach > size * 1e-8; round += 1) {
+  for (let round = 0; round < mostRounds && reach > size * precision; round += 1) {
     const next = oneStep(best, clear, reach, pull);
     const gain = next ? worth(best) - worth(next) : 0;
     if (next && gain > 0) best = next;

@@ -11,24 +11,39 @@ export interface UnitRow {
 
 /** Rows of pairs, the turned piece lifted by different heights against the upright one. */
 export function unitRows(frame: RowFrame, lifts: number): UnitRow[] {
-  const { turnedRings, leastPitch } = frame;
+  return liftsOf(frame, lifts).flatMap((lift) => {
+    const row = unitRow(frame, lift);
+    return row ? [row] : [];
+  });
+}
+
+/** Two kinds of rows of pairs with one pitch: in one the turned piece is lifted, in the other lowered. */
+export function oppositeRows(frame: RowFrame, lifts: number): [UnitRow, UnitRow][] {
+  return liftsOf(frame, lifts).flatMap((lift): [UnitRow, UnitRow][] => {
+    const [raised, lowered] = [unitRow(frame, lift), unitRow(frame, -lift)];
+    if (!raised || !lowered) return [];
+    const pitch = Math.max(raised.pitch, lowered.pitch);
+    return [[{ ...raised, pitch }, { ...lowered, pitch }]];
+  });
+}
+
+function liftsOf({ turnedRings }: RowFrame, lifts: number): number[] {
   if (!turnedRings) return [];
   const heights = turnedRings.flatMap((ring) => ring.map(({ y }) => y));
   const [low, high] = [Math.min(...heights), Math.max(...heights)];
-  const rows: UnitRow[] = [];
-  for (let at = 1; at < lifts; at += 1) {
-    const lift = low + ((high - low) * at) / lifts;
-    const [left, right] = chordAt(turnedRings, lift);
-    if (!(right > left)) continue;
-    rows.push({
-      pitch: Math.max(leastPitch, right - left),
-      members: [
-        { turn: 0, at: { x: 0, y: 0 } },
-        { turn: 180, at: { x: right, y: lift } },
-      ],
-    });
-  }
-  return rows;
+  return Array.from({ length: lifts - 1 }, (_, at) => low + ((high - low) * (at + 1)) / lifts);
+}
+
+function unitRow({ turnedRings, leastPitch }: RowFrame, lift: number): UnitRow | null {
+  const [left, right] = chordAt(turnedRings ?? [], lift);
+  if (!(right > left)) return null;
+  return {
+    pitch: Math.max(leastPitch, right - left),
+    members: [
+      { turn: 0, at: { x: 0, y: 0 } },
+      { turn: 180, at: { x: right, y: lift } },
+    ],
+  };
 }
 
 /** The least step of a row of pairs over another, by its shift. */
