@@ -27,6 +27,23 @@ export class Edges {
     this.#ends = Float64Array.from(ends);
   }
 
+  /** How deep a place lies inside, in mm; 0 where it is free. */
+  depth(x: number, y: number): number {
+    const { minX, minY, maxX, maxY } = this.bounds;
+    if (x <= minX || x >= maxX || y <= minY || y >= maxY) return 0;
+    const ends = this.#ends;
+    let [inside, least] = [false, Infinity];
+    for (let at = 0; at < ends.length; at += 4) {
+      const [x0, y0] = [(ends[at] as number) - x, (ends[at + 1] as number) - y];
+      const [x1, y1] = [(ends[at + 2] as number) - x, (ends[at + 3] as number) - y];
+      if (y0 > 0 !== y1 > 0 && x0 - (y0 / (y1 - y0)) * (x1 - x0) > 0) inside = !inside;
+      const [dx, dy] = [x1 - x0, y1 - y0];
+      const share = Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / (dx * dx + dy * dy)));
+      least = Math.min(least, (x0 + share * dx) ** 2 + (y0 + share * dy) ** 2);
+    }
+    return inside ? Math.sqrt(least) : 0;
+  }
+
   /** A convex part of what is free around a point outside: as half planes, within the given reach. */
   freeCell(x: number, y: number, reach: number): HalfPlane[] {
     const near = this.#near(x, y, reach);

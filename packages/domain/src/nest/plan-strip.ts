@@ -5,7 +5,7 @@ import type { NestPlacement, NestProblem } from './problem.ts';
 import { ringBounds, turned } from './ring.ts';
 import { rowFrame } from './row-frame.ts';
 import { type Base, basesOf, type Shape } from './shape.ts';
-import { type StripCell, shortened, stripEdges, type StripRules } from './strip-cell.ts';
+import { cellConflict, type StripCell, shortened, stripEdges, type StripRules } from './strip-cell.ts';
 import { rowsAcross, rowsAlong } from './strip-seeds.ts';
 import { unitsAlong } from './strip-units.ts';
 import { freeBases } from './free-bases.ts';
@@ -87,20 +87,30 @@ function distinct(seeds: readonly Seed[]): Seed[] {
 const halfTurnedIn = ({ pieces }: StripCell, { rot }: StripRules): number =>
   pieces.filter((piece) => piece.rot !== rot).length;
 
+const lifts = [0.02, 0.06, 0.12];
+const stretches = [1, 1.02, 1.05, 1.1, 1.15];
+
 /**
- * Two repeats, the second a little farther on and farther up the strip: then a piece need not lie
- * straight behind another.
+ * Two repeats, the second farther up the strip: then a piece need not lie straight behind another.
+ * Lengthened until it can be cut.
  */
-function doubled({ cell, rules }: Seed): Seed[] {
-  const { periodMm, pieces } = cell;
+function doubled({ cell: { periodMm, pieces }, rules }: Seed): Seed[] {
   if (pieces.length > 8) return [];
-  const apart = periodMm * 1.03;
-  const lift = (rules.same.bounds.maxY - rules.same.bounds.minY) / 25;
-  const raised = pieces.map(({ x, y, rot }) => {
-    const [, most] = rot === rules.rot ? rules.upright : rules.halfTurned;
-    return { x: x + apart, y: Math.min(most, y + lift), rot };
+  const { minY, maxY } = rules.same.bounds;
+  return lifts.flatMap((share) => {
+    const raised = pieces.map(({ x, y, rot }) => {
+      const [least, most] = rot === rules.rot ? rules.upright : rules.halfTurned;
+      const lift = (share * (maxY - minY)) / 2;
+      return { low: { x, y: Math.max(least, y - lift), rot }, high: { x, y: Math.min(most, y + lift), rot } };
+    });
+    for (const stretch of stretches) {
+      const apart = periodMm * stretch;
+      const second = raised.map(({ high }) => ({ ...high, x: high.x + apart }));
+      const cell = { periodMm: 2 * apart, pieces: [...raised.map(({ low }) => low), ...second] };
+      if (cellConflict(cell, rules) < 1e-6) return [{ rules, cell }];
+    }
+    return [];
   });
-  return [{ rules, cell: { periodMm: 2 * apart, pieces: [...pieces, ...raised] } }];
 }
 
 function isSound(problem: NestProblem, cell: StripCell): boolean {

@@ -64,6 +64,33 @@ function oneStep(cell: StripCell, rules: StripRules, reach: number): StripCell |
   };
 }
 
+/** How deep, in mm, pieces of a strip reach into what others must have clear; 0 for a sound cell. */
+export function cellConflict({ periodMm, pieces }: StripCell, rules: StripRules): number {
+  let worst = 0;
+  for (const [i, first] of pieces.entries()) {
+    for (const [j, second] of pieces.entries()) {
+      if (j < i) continue;
+      const { edges, sign } = between(first, second, rules);
+      if (!edges) continue;
+      const [dx, dy] = [sign * (second.x - first.x), sign * (second.y - first.y)];
+      const from = Math.ceil((edges.bounds.minX - dx) / periodMm);
+      for (let k = from; dx + k * periodMm < edges.bounds.maxX; k += 1) {
+        if (i !== j || k > 0) worst = Math.max(worst, edges.depth(dx + k * periodMm, dy));
+      }
+    }
+  }
+  return worst;
+}
+
+/** Against a half-turned piece, an upright one lies as its mirror image does. */
+function between(first: NestPlacement, second: NestPlacement, rules: StripRules) {
+  const alike = first.rot === second.rot;
+  return {
+    edges: alike ? rules.same : rules.turned,
+    sign: alike || first.rot === rules.rot ? 1 : -1,
+  };
+}
+
 function edgeWishes({ pieces }: StripCell, rules: StripRules, size: number): AtLeast[] {
   return pieces.flatMap(({ y, rot }, at) => {
     const [least, most] = rot === rules.rot ? rules.upright : rules.halfTurned;
@@ -103,11 +130,8 @@ function wishesOf(
   size: number,
   { first, second, i, j }: Pair,
 ): AtLeast[] {
-  const alike = first.rot === second.rot;
-  const edges = alike ? rules.same : rules.turned;
+  const { edges, sign } = between(first, second, rules);
   if (!edges) return [];
-  // Against a half-turned piece, an upright one lies as its mirror image does.
-  const sign = alike || first.rot === rules.rot ? 1 : -1;
   const { bounds } = edges;
   const margin = 3 * reach;
   const [dx, dy] = [sign * (second.x - first.x), sign * (second.y - first.y)];
