@@ -27,21 +27,42 @@ export class Edges {
     this.#ends = Float64Array.from(ends);
   }
 
+  /** How far a place is from the nearest edge, in mm. */
+  distance(x: number, y: number): number {
+    const ends = this.#ends;
+    let least = Infinity;
+    for (let at = 0; at < ends.length; at += 4) {
+      const [x0, y0] = [(ends[at] as number) - x, (ends[at + 1] as number) - y];
+      const [dx, dy] = [(ends[at + 2] as number) - x - x0, (ends[at + 3] as number) - y - y0];
+      const share = Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / (dx * dx + dy * dy)));
+      least = Math.min(least, (x0 + share * dx) ** 2 + (y0 + share * dy) ** 2);
+    }
+    return Math.sqrt(least);
+  }
+
   /** How deep a place lies inside, in mm; 0 where it is free. */
   depth(x: number, y: number): number {
     const { minX, minY, maxX, maxY } = this.bounds;
     if (x <= minX || x >= maxX || y <= minY || y >= maxY) return 0;
+    return this.isInside(x, y) ? this.distance(x, y) : 0;
+  }
+
+  isInside(x: number, y: number): boolean {
     const ends = this.#ends;
-    let [inside, least] = [false, Infinity];
+    let inside = false;
     for (let at = 0; at < ends.length; at += 4) {
-      const [x0, y0] = [(ends[at] as number) - x, (ends[at + 1] as number) - y];
-      const [x1, y1] = [(ends[at + 2] as number) - x, (ends[at + 3] as number) - y];
-      if (y0 > 0 !== y1 > 0 && x0 - (y0 / (y1 - y0)) * (x1 - x0) > 0) inside = !inside;
-      const [dx, dy] = [x1 - x0, y1 - y0];
-      const share = Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / (dx * dx + dy * dy)));
-      least = Math.min(least, (x0 + share * dx) ** 2 + (y0 + share * dy) ** 2);
+      const [y0, y1] = [(ends[at + 1] as number) - y, (ends[at + 3] as number) - y];
+      if (y0 > 0 === y1 > 0) continue;
+      const x0 = (ends[at] as number) - x;
+      if (x0 - (y0 / (y1 - y0)) * ((ends[at + 2] as number) - x - x0) > 0) inside = !inside;
     }
-    return inside ? Math.sqrt(least) : 0;
+    return inside;
+  }
+
+  /** The half plane beyond the nearest edge: the shortest way out from inside. */
+  wayOut(x: number, y: number): HalfPlane {
+    const nearest = this.#near(x, y, this.distance(x, y) + 1e-6)[0];
+    return this.#lineOf(nearest?.at ?? 0);
   }
 
   /** A convex part of what is free around a point outside: as half planes, within the given reach. */
@@ -87,6 +108,15 @@ export class Edges {
     const from = Math.max(0, middle - reach) / long;
     const to = Math.min(long, middle + reach) / long;
     return [from, to].map((share) => ({ x: x0 + share * dx, y: y0 + share * dy }));
+  }
+
+  #lineOf(at: number): HalfPlane {
+    const ends = this.#ends;
+    const [x0, y0] = [ends[at] as number, ends[at + 1] as number];
+    const [dx, dy] = [(ends[at + 2] as number) - x0, (ends[at + 3] as number) - y0];
+    const long = Math.hypot(dx, dy);
+    const [nx, ny] = [dy / long, -dx / long];
+    return { nx, ny, d: nx * x0 + ny * y0 };
   }
 
   /** The edge's own line where the point lies beyond it, else the line square to the way there. */

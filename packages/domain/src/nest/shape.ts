@@ -22,6 +22,9 @@ export interface Shape {
 /** What a spacing may fall short by, in mm: a hundredth of what a check allows. */
 const gapShortfall = 1e-5;
 
+/** The spacing to work with. */
+export const gapFor = (gap: number): number => Math.max(0, gap - gapShortfall);
+
 /** How far no-fit polygons may go beyond what is needed, in shares of a piece's size. */
 const bluntness = 1e-5;
 
@@ -32,7 +35,7 @@ export function shapeOf(outline: Ring, gap: number): Shape {
   const drawnIn = inset(ring, slack);
   const first = gap > 0 ? ring : drawnIn;
   const spaced = (other: Ring) =>
-    grown(minkowskiSum(first, other), gap > 0 ? Math.max(0, gap - gapShortfall) : 0).map((part) =>
+    grown(minkowskiSum(first, other), gapFor(gap)).map((part) =>
       blunted(part, bluntness * Math.sqrt(areaMm2)),
     );
   const symmetrical = isSymmetrical(ring);
