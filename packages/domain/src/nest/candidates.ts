@@ -18,10 +18,14 @@ export class Candidates {
   readonly #room: Room;
   readonly #noFit: NoFitPair;
   readonly #kept: Candidate[] = [];
+  readonly #runnersUp = new Map<string, Candidate>();
+  readonly #below: number;
 
-  constructor(room: Room, noFit: NoFitPair) {
+  /** @param below by how many fewer pieces than the best others are remembered as well */
+  constructor(room: Room, noFit: NoFitPair, below = 0) {
     this.#room = room;
     this.#noFit = noFit;
+    this.#below = below;
   }
 
   /**
@@ -32,8 +36,9 @@ export class Candidates {
     if (!(areaPerPiece(crystal) > 1e-6)) return;
     const free = this.#freeFor(crystal, rot);
     if (free.every((rings) => rings.length === 0)) return;
-    if (mostInBox(crystal, free) <= this.most) return;
+    if (mostInBox(crystal, free) <= this.most - this.#below) return;
     const phase = new PhaseSearch(crystal, free).best(tries, lines);
+    if (phase.count > this.most - this.#below) this.#remember({ crystal, rot, phase });
     if (phase.count <= this.most || !this.#canBeCut(crystal, rot)) return;
     this.#kept.unshift({ crystal, rot, phase });
   }
@@ -46,6 +51,21 @@ export class Candidates {
   /** Most pieces first. */
   get kept(): readonly Candidate[] {
     return this.#kept;
+  }
+
+  /** What gives all but as many, one of each density, most pieces first. */
+  runnersUp(most: number): Candidate[] {
+    return [...this.#runnersUp.values()]
+      .filter(({ phase }) => phase.count > this.most - this.#below)
+      .sort((a, b) => b.phase.count - a.phase.count)
+      .filter(({ crystal, rot }) => this.#canBeCut(crystal, rot))
+      .slice(0, most);
+  }
+
+  #remember(candidate: Candidate): void {
+    const { crystal, phase } = candidate;
+    const key = `${phase.count} ${areaPerPiece(crystal).toFixed(0)} ${crystal.members.length}`;
+    if (!this.#runnersUp.has(key)) this.#runnersUp.set(key, candidate);
   }
 
   placements({ crystal, rot, phase }: Candidate): NestPlacement[] {

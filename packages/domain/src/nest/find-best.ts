@@ -1,9 +1,13 @@
-import { nestFaults } from './nest-faults.ts';
+import { panelSeeds } from './best-seeds.ts';
 import { Surroundings } from './layout-state.ts';
+import { nestFaults } from './nest-faults.ts';
+import { patternsFor } from './plan-regular.ts';
 import type { NestPlacement, NestProblem, RegularPlan } from './problem.ts';
 import { Room } from './room.ts';
+import { rowMixes } from './row-mixes.ts';
 import { searchMore } from './search-more.ts';
-import { shapeOf } from './shape.ts';
+import { type Shape, shapeOf } from './shape.ts';
+import { parted } from './squeeze.ts';
 
 export interface BestSearch {
   seedPlan: RegularPlan;
@@ -14,19 +18,57 @@ export interface BestSearch {
 }
 
 const usualBudget = 120;
+/** Layouts of more pieces are not parted as a whole. */
+const mostParted = 60;
 
 /**
  * The best layout found anyhow: never fewer pieces (for a strip: never longer) than the regular
  * plan it starts from. The same problem and budget always give the same layout.
  */
 export function findBest(problem: NestProblem, search: BestSearch): NestPlacement[] {
-  const { container } = problem;
-  const { seedPlan, budget = usualBudget } = search;
-  const seed = seedPlan.placements;
+  const { container, holes = [] } = problem;
+  const seed = search.seedPlan.placements;
   if (container.type === 'strip') return seed.slice(0, container.qty);
   if (seed.length === 0) return seed;
   const shape = shapeOf(problem.outline, problem.gap);
-  const around = new Surroundings(new Room(problem, shape), shape, problem.gap);
-  const found = searchMore(seed, around, { ...search, budget });
-  return nestFaults(problem, found).length === 0 ? found : seed;
+  const room = new Room(problem, shape);
+  const around = new Surroundings(room, shape, problem.gap);
+  const rots = turnsOf(problem, seed);
+  const seeds =
+    container.type === 'rect' && holes.length === 0 ? panelLayouts(problem, shape, around, seed, rots) : [seed];
+  const share = Math.ceil((search.budget ?? usualBudget) / seeds.length);
+  let best = seed;
+  for (const layout of seeds) {
+    const found = searchMore(layout, rots, around, { ...search, budget: share });
+    if (found.length > best.length && nestFaults(problem, found).length === 0) best = found;
+  }
+  return best;
+}
+
+/** The turns that pieces are tried in. */
+function turnsOf({ rotations }: NestProblem, seed: readonly NestPlacement[]): number[] {
+  const used = seed.map(({ rot }) => rot);
+  const allowed = rotations === 'free' ? used.map((rot) => (rot + 90) % 360) : rotations;
+  return [...new Set([...used, ...allowed])].slice(0, 8);
+}
+
+/** Where to begin on a panel: the best layouts of different kinds, with more pieces where that works. */
+function panelLayouts(
+  problem: NestProblem,
+  shape: Shape,
+  around: Surroundings,
+  seed: NestPlacement[],
+  rots: readonly number[],
+): NestPlacement[][] {
+  const { sound, sticking } = panelSeeds(problem, shape, around.room, patternsFor(problem, shape));
+  const squeezed = sticking
+    .filter((layout) => layout.length > seed.length && layout.length <= mostParted)
+    .flatMap((layout) => {
+      const inside = parted(layout, [], around);
+      return inside ? [inside] : [];
+    });
+  const mixes = rowMixes(problem, shape, around, rots).filter(
+    (layout) => nestFaults(problem, layout).length === 0,
+  );
+  return [...squeezed, ...mixes, seed, ...sound].sort((a, b) => b.length - a.length).slice(0, 5);
 }

@@ -56,7 +56,8 @@ export function fitMore(
   }
 }
 
-function nearMisses(most: number, shape: Shape, room: Room, pool: readonly Seed[]) {
+/** Patterns that give more than `most` on a slightly larger panel, the least growth first. */
+export function nearMisses(most: number, shape: Shape, room: Room, pool: readonly Seed[]) {
   const size = Math.sqrt(shape.areaMm2);
   const densest = [...pool].sort((a, b) => areaPerPiece(a.crystal) - areaPerPiece(b.crystal));
   const seen = new Set<string>();

@@ -59,9 +59,8 @@ function tableOf(
   return { rows, columns };
 }
 
-const mostPivots = 200;
-
 function pivotToTheEnd(table: Table): boolean {
+  const mostPivots = 200 + 10 * table.rows.length;
   for (let turn = 0; turn < mostPivots; turn += 1) {
     const column = enteringColumn(table, turn > mostPivots / 2);
     if (column < 0) return true;

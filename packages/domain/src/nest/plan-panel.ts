@@ -21,6 +21,17 @@ export function panelCandidates(
   patterns: readonly Pattern[],
 ): Candidates {
   const candidates = new Candidates(room, shape.noFit);
+  fitMore(candidates, shape, room, panelPool(candidates, problem, shape, patterns));
+  return candidates;
+}
+
+/** All patterns that suit a panel, each of them considered. */
+export function panelPool(
+  candidates: Candidates,
+  problem: NestProblem,
+  shape: Shape,
+  patterns: readonly Pattern[],
+): Seed[] {
   const pool: Seed[] = [];
   const consider = (seed: Seed, lines: number) => {
     candidates.consider(seed.crystal, seed.rot, lines);
@@ -39,8 +50,7 @@ export function panelCandidates(
       consider({ crystal: turnedCrystal(crystal, rot), rot }, tries);
     }
   }
-  fitMore(candidates, shape, room, pool);
-  return candidates;
+  return pool;
 }
 
 const effortFor = (rotations: Rotations): RowEffort =>

@@ -52,7 +52,8 @@ export function planRegular(problem: NestProblem): RegularPlan {
 
 const effort = { seeds: 48, kept: 12 };
 
-function patternsFor({ rotations }: NestProblem, shape: Shape): Pattern[] {
+/** Dense patterns of what may be turned how. */
+export function patternsFor({ rotations }: NestProblem, shape: Shape): Pattern[] {
   const bases = basesOf(rotations, shape.symmetrical);
   const halfTurns = bases === null || bases.some((base) => base.halfTurns);
   return densePatterns(halfTurns ? shape.noFit : { ...shape.noFit, turned: null }, effort);

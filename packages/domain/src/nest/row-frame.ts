@@ -47,7 +47,7 @@ function alongX(ring: Ring, directionDeg: number): Point[] {
 const mirrored = (ring: Ring): Point[] => ring.map(({ x, y }) => ({ x: -x, y: -y }));
 
 /** Upper edges run towards negative x, in counter-clockwise rings. */
-function topOf(rings: readonly Ring[]): Pieces {
+export function topOf(rings: readonly Ring[]): Pieces {
   const upper: number[] = [];
   for (const ring of rings) {
     let from = ring[ring.length - 1] as Point;
@@ -60,7 +60,7 @@ function topOf(rings: readonly Ring[]): Pieces {
 }
 
 /** The least pitch of which no multiple lies inside the no-fit polygon, by where y = 0 crosses it. */
-function leastPitch(rings: readonly Ring[]): number {
+export function leastPitch(rings: readonly Ring[]): number {
   const inside = crossings(rings, 0).filter(([, to]) => to > 1e-9);
   const free = (pitch: number) =>
     inside.every(([from, to]) => {

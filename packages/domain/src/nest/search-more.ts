@@ -17,6 +17,7 @@ const samples = 900;
 /** Brings one piece after another into a layout where others can make way for it. */
 export function searchMore(
   seed: readonly NestPlacement[],
+  rots: readonly number[],
   around: Surroundings,
   { budget, onProgress, shouldStop }: SearchEffort,
 ): NestPlacement[] {
@@ -26,7 +27,7 @@ export function searchMore(
   for (let turn = 0; turn < budget; turn += 1) {
     if (shouldStop?.()) break;
     onProgress?.(turn / budget, layout.length);
-    if (places.length === 0) places = likelyPlaces(layout, around, chance);
+    if (places.length === 0) places = likelyPlaces(layout, rots, around, chance);
     const place = places.shift();
     if (!place) break;
     const more = broughtIn(place.at, layout, around);
@@ -47,10 +48,10 @@ interface Place {
 /** Places where a piece would be least in the way, spread over the room. */
 function likelyPlaces(
   layout: readonly NestPlacement[],
+  rots: readonly number[],
   around: Surroundings,
   chance: () => number,
 ): Place[] {
-  const rots = [...new Set(layout.map(({ rot }) => rot))];
   const places = rots.flatMap((rot) => {
     const free = around.room.free(rot);
     const { minX, minY, maxX, maxY } = ringBounds(free);
