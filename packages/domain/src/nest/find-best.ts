@@ -4,7 +4,7 @@ import { nestFaults } from './nest-faults.ts';
 import { patternsFor } from './plan-regular.ts';
 import type { NestPlacement, NestProblem, RegularPlan } from './problem.ts';
 import { Room } from './room.ts';
-import { rowMixes } from './row-mixes.ts';
+import { rowMixes, turnsToMix } from './row-mixes.ts';
 import { searchMore } from './search-more.ts';
 import { type Shape, shapeOf } from './shape.ts';
 import { parted } from './squeeze.ts';
@@ -33,7 +33,7 @@ export function findBest(problem: NestProblem, search: BestSearch): NestPlacemen
   const shape = shapeOf(problem.outline, problem.gap);
   const room = new Room(problem, shape);
   const around = new Surroundings(room, shape, problem.gap);
-  const rots = turnsOf(problem, seed);
+  const rots = turnsOf(problem, shape, seed);
   const seeds =
     container.type === 'rect' && holes.length === 0 ? panelLayouts(problem, shape, around, seed, rots) : [seed];
   const share = Math.ceil((search.budget ?? usualBudget) / seeds.length);
@@ -46,10 +46,16 @@ export function findBest(problem: NestProblem, search: BestSearch): NestPlacemen
 }
 
 /** The turns that pieces are tried in. */
-function turnsOf({ rotations }: NestProblem, seed: readonly NestPlacement[]): number[] {
-  const used = seed.map(({ rot }) => rot);
-  const allowed = rotations === 'free' ? used.map((rot) => (rot + 90) % 360) : rotations;
-  return [...new Set([...used, ...allowed])].slice(0, 8);
+function turnsOf(
+  { rotations }: NestProblem,
+  shape: Shape,
+  seed: readonly NestPlacement[],
+): number[] {
+  const used = [...new Set(seed.map(({ rot }) => rot))];
+  const allowed =
+    rotations === 'free' ? used.map((rot) => (rot + 90) % 360) : turnsToMix(rotations, shape);
+  const others = allowed.filter((rot) => !shape.symmetrical || !used.includes((rot + 180) % 360));
+  return [...new Set([...used, ...others])].slice(0, 8);
 }
 
 /** Where to begin on a panel: the best layouts of different kinds, with more pieces where that works. */

@@ -1,12 +1,14 @@
 import { checkNestProblem, fitsNowhere } from './check-problem.ts';
 import type { Crystal } from './crystal.ts';
 import { densePatterns, type Pattern } from './dense-patterns.ts';
+import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
 import { panelCandidates } from './plan-panel.ts';
 import { sideCandidates } from './plan-side.ts';
 import { bestStripCell, repeated } from './plan-strip.ts';
 import type { NestProblem, RegularPlan, RowNumbers } from './problem.ts';
 import { Room } from './room.ts';
+import { mixNumbers, rowMixes, turnsToMix } from './row-mixes.ts';
 import { basesOf, type Shape, shapeOf } from './shape.ts';
 import type { StripCell } from './strip-cell.ts';
 
@@ -33,21 +35,35 @@ export function planRegular(problem: NestProblem): RegularPlan {
   if (problem.container.type === 'strip') {
     return { ...planStrip(problem, shape, patterns), planeDensity };
   }
-  const room = new Room(problem, shape);
-  const plan =
-    problem.container.type === 'rect' && !problem.holes?.length ? panelCandidates : sideCandidates;
-  const candidates = plan(problem, shape, room, patterns);
+  const patterned = bestPattern(problem, shape, patterns);
+  return { ...nothing, ...mixedRows(problem, shape, patterned), planeDensity };
+}
+
+type Laid = Pick<RegularPlan, 'placements' | 'rows'>;
+
+/** The best repeating pattern that passes a second look. */
+function bestPattern(problem: NestProblem, shape: Shape, patterns: readonly Pattern[]): Laid {
+  const isPanel = problem.container.type === 'rect' && !problem.holes?.length;
+  const plan = isPanel ? panelCandidates : sideCandidates;
+  const candidates = plan(problem, shape, new Room(problem, shape), patterns);
   for (const candidate of candidates.kept) {
     const placements = candidates.placements(candidate);
     if (nestFaults(problem, placements).length > 0) continue;
-    return {
-      ...nothing,
-      placements,
-      planeDensity,
-      rows: rowNumbers(candidate.crystal, candidate.rot),
-    };
+    return { placements, rows: rowNumbers(candidate.crystal, candidate.rot) };
   }
-  return { ...nothing, planeDensity };
+  return { placements: [], rows: null };
+}
+
+/** Rows of different kinds one above the other, where a panel gets more from them. */
+function mixedRows(problem: NestProblem, shape: Shape, patterned: Laid): Laid {
+  const { container, rotations, holes = [], gap } = problem;
+  if (container.type !== 'rect' || rotations === 'free' || holes.length > 0) return patterned;
+  const around = new Surroundings(new Room(problem, shape), shape, gap);
+  const most = patterned.placements.length;
+  const mix = rowMixes(problem, shape, around, turnsToMix(rotations, shape)).find(
+    (layout) => layout.length > most && nestFaults(problem, layout).length === 0,
+  );
+  return mix ? { placements: mix, rows: mixNumbers(mix) } : patterned;
 }
 
 const effort = { seeds: 48, kept: 12 };
