@@ -1,4 +1,5 @@
 import { panelSeeds } from './best-seeds.ts';
+import { centred } from './centred.ts';
 import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
 import { patternsFor } from './plan-regular.ts';
@@ -25,18 +26,28 @@ const mostParted = 60;
  * The best layout found anyhow: never fewer pieces (for a strip: never longer) than the regular
  * plan it starts from. The same problem and budget always give the same layout.
  */
-export function findBest(problem: NestProblem, search: BestSearch): NestPlacement[] {
+export function findBest(given: NestProblem, search: BestSearch): NestPlacement[] {
+  const { container } = given;
+  const { placements } = search.seedPlan;
+  if (container.type === 'strip') return placements.slice(0, container.qty);
+  if (placements.length === 0) return placements;
+  const { problem, asGiven, asCentred } = centred(given);
+  return bestFrom(problem, placements.map(asCentred), search).map(asGiven);
+}
+
+function bestFrom(
+  problem: NestProblem,
+  seed: NestPlacement[],
+  search: BestSearch,
+): NestPlacement[] {
   const { container, holes = [] } = problem;
-  const seed = search.seedPlan.placements;
-  if (container.type === 'strip') return seed.slice(0, container.qty);
-  if (seed.length === 0) return seed;
   const shape = shapeOf(problem.outline, problem.gap);
   const room = new Room(problem, shape);
   const around = new Surroundings(room, shape, problem.gap);
   const rots = turnsOf(problem, shape, seed);
   const seeds =
     container.type === 'rect' && holes.length === 0 ? panelLayouts(problem, shape, around, seed, rots) : [seed];
-  const share = Math.ceil((search.budget ?? usualBudget) / seeds.length);
+  const share = Math.ceil(triesFor(search, seed.length) / seeds.length);
   let best = seed;
   for (const layout of seeds) {
     const found = searchMore(layout, rots, around, { ...search, budget: share });
@@ -44,6 +55,10 @@ export function findBest(problem: NestProblem, search: BestSearch): NestPlacemen
   }
   return best;
 }
+
+/** Of very many pieces each try takes longer, so there are fewer. */
+const triesFor = ({ budget = usualBudget }: BestSearch, pieces: number): number =>
+  Math.ceil(budget * Math.min(1, 400 / pieces));
 
 /** The turns that pieces are tried in. */
 function turnsOf(

@@ -1,3 +1,4 @@
+import { centred } from './centred.ts';
 import { checkNestProblem, fitsNowhere } from './check-problem.ts';
 import type { Crystal } from './crystal.ts';
 import { densePatterns, type Pattern } from './dense-patterns.ts';
@@ -26,8 +27,14 @@ const nothing: RegularPlan = {
  * not fit gives none. Every plan has been looked over by `nestFaults`.
  * @throws InvalidInput naming what makes no sense · NotWorkable beyond 20,000 pieces
  */
-export function planRegular(problem: NestProblem): RegularPlan {
-  checkNestProblem(problem);
+export function planRegular(given: NestProblem): RegularPlan {
+  checkNestProblem(given);
+  const { problem, asGiven } = centred(given);
+  const plan = planCentred(problem);
+  return { ...plan, placements: plan.placements.map(asGiven) };
+}
+
+function planCentred(problem: NestProblem): RegularPlan {
   const shape = shapeOf(problem.outline, problem.gap);
   if (fitsNowhere(problem, shape)) return nothing;
   const patterns = patternsFor(problem, shape);

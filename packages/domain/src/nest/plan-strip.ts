@@ -25,7 +25,7 @@ export function bestStripCell(
     return rules ? seedsFor(shape, base, rules).map((cell) => ({ cell, rules })) : [];
   });
   seeds.sort((a, b) => perPiece(a.cell) - perPiece(b.cell));
-  const shorter = [...distinct(seeds), ...distinct(seeds).slice(0, 4).flatMap(doubled)]
+  const shorter = [...distinct(seeds), ...distinct(seeds).slice(0, 2).flatMap(doubled)]
     .map(({ cell, rules }) => shortened(cell, rules))
     .sort((a, b) => perPiece(a) - perPiece(b));
   return (
@@ -87,7 +87,7 @@ function distinct(seeds: readonly Seed[]): Seed[] {
 const halfTurnedIn = ({ pieces }: StripCell, { rot }: StripRules): number =>
   pieces.filter((piece) => piece.rot !== rot).length;
 
-const lifts = [0.02, 0.06, 0.12];
+const lifts = [0.03, 0.1];
 const stretches = [1, 1.02, 1.05, 1.1, 1.15];
 
 /**

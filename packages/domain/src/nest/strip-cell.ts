@@ -26,7 +26,8 @@ export function stripEdges(noFit: NoFitPair, rot: number): Pick<StripRules, 'sam
   return { same: edges(noFit.same), turned: noFit.turned && edges(noFit.turned) };
 }
 
-const mostRounds = 40;
+/** Of many pieces every round takes longer, and fewer must do. */
+const roundsFor = (pieces: number): number => Math.max(6, Math.min(30, Math.floor(160 / pieces)));
 
 /**
  * Moves the pieces of one repeat so that it becomes shorter, by linear programmes in which every
@@ -36,7 +37,8 @@ export function shortened(cell: StripCell, rules: StripRules): StripCell {
   let best = cell;
   const size = rules.same.bounds.maxX;
   let reach = size / 10;
-  for (let round = 0; round < mostRounds && reach > size * 1e-7; round += 1) {
+  const mostRounds = roundsFor(cell.pieces.length);
+  for (let round = 0; round < mostRounds && reach > size * 1e-6; round += 1) {
     const next = oneStep(best, rules, reach);
     const gain = next ? best.periodMm - next.periodMm : 0;
     if (next && gain > 0) best = next;
