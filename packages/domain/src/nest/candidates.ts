@@ -89,7 +89,10 @@ export class Candidates {
  * For rows along an edge of a box, the most pieces that any way of laying the pattern could give;
  * otherwise no bound.
  */
-function mostInBox({ along, across, members }: Crystal, free: readonly (readonly Ring[])[]): number {
+function mostInBox(
+  { along, across, members }: Crystal,
+  free: readonly (readonly Ring[])[],
+): number {
   const lying = Math.abs(along.y) < 1e-9;
   if (!lying && Math.abs(along.x) > 1e-9) return Infinity;
   return members.reduce((sum, _, member) => {

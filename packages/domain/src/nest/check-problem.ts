@@ -89,15 +89,17 @@ function checkRing(ring: Ring, field: string, most: number): void {
 
 function checkCourse(ring: Ring, field: string): void {
   const { minX, minY, maxX, maxY } = ringBounds([ring]);
-  if (!(Math.abs(signedArea(ring)) > 1e-9 * Math.max(1, (maxX - minX) * (maxY - minY)))) {
+  const box = (maxX - minX) * (maxY - minY);
+  const crossing = box > 0 ? crossingOf(ring) : null;
+  if (crossing) {
+    throw new InvalidInput(
+      field,
+      `Draw ${field} so that it does not cross itself: near ${placeText(crossing)} mm it does.`,
+    );
+  }
+  if (!(Math.abs(signedArea(ring)) > 1e-9 * Math.max(1, box))) {
     throw new InvalidInput(field, `Draw ${field} around an area: it encloses none.`);
   }
-  const crossing = crossingOf(ring);
-  if (!crossing) return;
-  throw new InvalidInput(
-    field,
-    `Draw ${field} so that it does not cross itself: near ${placeText(crossing)} mm it does.`,
-  );
 }
 
 const placeText = ({ x, y }: Point): string => `(${x.toFixed(2)}, ${y.toFixed(2)})`;

@@ -46,7 +46,9 @@ function bestFrom(
   const around = new Surroundings(room, shape, problem.gap);
   const rots = turnsOf(problem, shape, seed);
   const seeds =
-    container.type === 'rect' && holes.length === 0 ? panelLayouts(problem, shape, around, seed, rots) : [seed];
+    container.type === 'rect' && holes.length === 0
+      ? panelLayouts(problem, shape, around, seed, rots)
+      : [seed];
   const share = Math.ceil(triesFor(search, seed.length) / seeds.length);
   let best = seed;
   for (const layout of seeds) {

@@ -12,7 +12,7 @@ import { tightened } from './tighten.ts';
 /** Lines of a pattern to look along at first, and for what has given most. */
 const [firstTries, lastTries] = [24, 240];
 const variations = 80;
-const angles = 16;
+const angles = 8;
 /** How strongly variations are pulled away from the densest, in shares of a piece's size. */
 const pulls = [0.03, 0.1, 0.2];
 
@@ -29,10 +29,13 @@ export function sideCandidates(
     if (crystal.members.length > 1 && !halfTurns) return;
     candidates.consider(turnedCrystal(crystal, rot), rot, firstTries);
   };
-  for (const base of bases) for (const { crystal } of patterns) consider(crystal, base);
+  const looked = rotations === 'free' ? patterns.slice(0, 4) : patterns;
+  for (const base of bases) for (const { crystal } of looked) consider(crystal, base);
   const perBase = Math.ceil(variations / bases.length);
   for (const base of bases) {
-    const allowed = patterns.filter(({ crystal }) => base.halfTurns || crystal.members.length === 1);
+    const allowed = patterns.filter(
+      ({ crystal }) => base.halfTurns || crystal.members.length === 1,
+    );
     for (const crystal of varied(shape, allowed, perBase)) consider(crystal, base);
   }
   for (const { crystal, rot } of candidates.kept.slice(0, 2)) {

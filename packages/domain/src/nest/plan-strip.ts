@@ -5,7 +5,13 @@ import type { NestPlacement, NestProblem } from './problem.ts';
 import { ringBounds, turned } from './ring.ts';
 import { rowFrame } from './row-frame.ts';
 import { type Base, basesOf, type Shape } from './shape.ts';
-import { cellConflict, type StripCell, shortened, stripEdges, type StripRules } from './strip-cell.ts';
+import {
+  cellConflict,
+  type StripCell,
+  shortened,
+  stripEdges,
+  type StripRules,
+} from './strip-cell.ts';
 import { rowsAcross, rowsAlong } from './strip-seeds.ts';
 import { unitsAlong } from './strip-units.ts';
 import { freeBases } from './free-bases.ts';
@@ -101,7 +107,10 @@ function doubled({ cell: { periodMm, pieces }, rules }: Seed): Seed[] {
     const raised = pieces.map(({ x, y, rot }) => {
       const [least, most] = rot === rules.rot ? rules.upright : rules.halfTurned;
       const lift = (share * (maxY - minY)) / 2;
-      return { low: { x, y: Math.max(least, y - lift), rot }, high: { x, y: Math.min(most, y + lift), rot } };
+      return {
+        low: { x, y: Math.max(least, y - lift), rot },
+        high: { x, y: Math.min(most, y + lift), rot },
+      };
     });
     for (const stretch of stretches) {
       const apart = periodMm * stretch;

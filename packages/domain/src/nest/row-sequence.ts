@@ -105,7 +105,8 @@ function bestStacks(
         const step = steps[last]?.[next] ?? 0;
         const y = Math.max(row.least, state.y + step);
         // Rows beside each other would go on for ever.
-        if (step > 1e-2 * reach && y <= row.most + 1e-9) set(count + row.xs.length, next, { y, before: last });
+        if (step > 1e-2 * reach && y <= row.most + 1e-9)
+          set(count + row.xs.length, next, { y, before: last });
       });
     });
   }
@@ -118,7 +119,7 @@ function ends(states: readonly (State | undefined)[][], rows: readonly Row[]): n
     states[count]?.forEach((state, last) => {
       if (!state) return;
       const stack: number[] = [];
-      for (let [left, row] = [count, last]; row >= 0; ) {
+      for (let [left, row] = [count, last]; row >= 0;) {
         stack.unshift(row);
         const before = states[left]?.[row]?.before ?? -1;
         left -= rows[row]?.xs.length ?? left;

@@ -92,9 +92,7 @@ function broughtIn(
   const movable = order.slice(0, mostMovable).map(({ piece }) => piece);
   const rest = order.slice(mostMovable).map(({ piece }) => piece);
   const near = rest.filter((piece) =>
-    movable.some(
-      ({ x, y }) => Math.hypot(piece.x - x, piece.y - y) < around.reach * 1.3,
-    ),
+    movable.some(({ x, y }) => Math.hypot(piece.x - x, piece.y - y) < around.reach * 1.3),
   );
   const moved = parted([at, ...movable], near, around);
   return moved && [...rest, ...moved];

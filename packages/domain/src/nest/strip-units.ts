@@ -70,5 +70,14 @@ function spanOf({ members }: UnitRow, rules: StripRules): [least: number, most: 
   return [Math.max(...spans.map(([low]) => low)), Math.min(...spans.map(([, high]) => high))];
 }
 
-const piecesOf = (row: UnitRow | undefined, { rot }: StripRules, x: number, y: number): NestPlacement[] =>
-  (row?.members ?? []).map(({ turn, at }) => ({ x: x + at.x, y: y + at.y, rot: (rot + turn) % 360 }));
+const piecesOf = (
+  row: UnitRow | undefined,
+  { rot }: StripRules,
+  x: number,
+  y: number,
+): NestPlacement[] =>
+  (row?.members ?? []).map(({ turn, at }) => ({
+    x: x + at.x,
+    y: y + at.y,
+    rot: (rot + turn) % 360,
+  }));

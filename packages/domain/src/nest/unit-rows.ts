@@ -23,7 +23,12 @@ export function oppositeRows(frame: RowFrame, lifts: number): [UnitRow, UnitRow]
     const [raised, lowered] = [unitRow(frame, lift), unitRow(frame, -lift)];
     if (!raised || !lowered) return [];
     const pitch = Math.max(raised.pitch, lowered.pitch);
-    return [[{ ...raised, pitch }, { ...lowered, pitch }]];
+    return [
+      [
+        { ...raised, pitch },
+        { ...lowered, pitch },
+      ],
+    ];
   });
 }
 
