@@ -6,6 +6,7 @@ import { Card } from '../../../components/card.tsx';
 import { SidePaths } from '../../../components/side-paths.tsx';
 import { boxOf } from '../side-sketch.ts';
 import { lotDrawingQuery } from '../lots.queries.ts';
+import { UsableShareForm } from './usable-share-form.tsx';
 import { SideEditor } from './side-editor.tsx';
 
 /** The lot's edge and flaws, and drawing them. */
@@ -36,7 +37,14 @@ export function SideCard({ lot }: { lot: Lot }) {
           onDone={() => setEditing(false)}
         />
       ) : (
-        <Drawn outline={drawing.outline} flaws={drawing.flaws} />
+        <>
+          <Drawn outline={drawing.outline} flaws={drawing.flaws} />
+          {drawing.outline === null && (
+            <div className="mt-4">
+              <UsableShareForm key={drawing.version} lot={lot} drawing={drawing} />
+            </div>
+          )}
+        </>
       )}
     </Card>
   );

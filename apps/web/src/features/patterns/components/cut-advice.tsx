@@ -10,7 +10,6 @@ import {
   countText,
   lengthText,
   moneyText,
-  numberText,
   sizeText,
 } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
@@ -112,7 +111,7 @@ function columnsFor({ lengthUnit, areaUnit, currency }: Workshop): Column<Row>[]
       id: 'each',
       header: 'Whole, each',
       value: (row) => row.perGoodPiece,
-      cell: (row) => orDash(row.perGoodPiece, (price) => numberText(price, 3)),
+      cell: (row) => orDash(row.perGoodPiece, (price) => Number(price).toFixed(3)),
       align: 'right',
     },
     {
