@@ -208,7 +208,6 @@ describe('alternating rows in a strip as high as the piece', () => {
     [100, 30, 10, 4],
     [60, 25, 15, 2],
     [24, 25, 15, 0],
-    [100, 40, 0.001, 4],
   ])('%i mm long, of trapezoids of bases %d and %d give %i', (length, a, c, count) => {
     const trapezoid = ringOf([
       [0, 0],

@@ -148,7 +148,7 @@ function cyclesOf(steps: Steps, a: Ring, b: Ring): Point[][] {
 }
 
 /** Whether a counter-clockwise ring never turns right. */
-export function isConvex(points: Ring): boolean {
+function isConvex(points: Ring): boolean {
   const ring = withoutRepeats(points);
   if (signedArea(ring) <= 0) return false;
   return ring.every((corner, at) => {

@@ -51,7 +51,7 @@ const patternOf = (crystal: Crystal): Pattern => ({ crystal, areaMm2: areaPerPie
 const coarser = (ring: Ring): Ring => thinnedAround(ring, 48);
 
 /** The best straight and the best alternating rows in a direction of the outline's own. */
-export function patternsAt(noFit: NoFitPair, directionDeg: number): Pattern[] {
+function patternsAt(noFit: NoFitPair, directionDeg: number): Pattern[] {
   const frame = rowFrame(noFit, directionDeg);
   const curves = rowCurves(frame, frame.leastPitch);
   const straight = driftShifts(curves, 3).map((shift) => driftingRows(curves, shift));

@@ -5,19 +5,14 @@ import type { NestPlacement, NestProblem } from './problem.ts';
 import { ringBounds, turned } from './ring.ts';
 import { rowFrame } from './row-frame.ts';
 import { type Base, basesOf, type Shape } from './shape.ts';
-import {
-  cellConflict,
-  type StripCell,
-  shortened,
-  stripEdges,
-  type StripRules,
-} from './strip-cell.ts';
+import { type StripCell, shortened, stripEdges, type StripRules } from './strip-cell.ts';
 import { rowsAcross, rowsAlong } from './strip-seeds.ts';
+import { perPiece, squeezedCells, type StripSeed } from './strip-squeeze.ts';
 import { unitsAlong } from './strip-units.ts';
 import { freeBases } from './free-bases.ts';
 
 /** How many of the most promising patterns are shortened. */
-const mostShortened = 6;
+const mostShortened = 5;
 
 /** The pattern that takes the least strip per piece; null where no piece fits across the strip. */
 export function bestStripCell(
@@ -31,17 +26,12 @@ export function bestStripCell(
     return rules ? seedsFor(shape, base, rules).map((cell) => ({ cell, rules })) : [];
   });
   seeds.sort((a, b) => perPiece(a.cell) - perPiece(b.cell));
-  const shorter = [...distinct(seeds), ...distinct(seeds).slice(0, 2).flatMap(doubled)]
-    .map(({ cell, rules }) => shortened(cell, rules))
-    .sort((a, b) => perPiece(a) - perPiece(b));
-  return (
-    shorter.find((cell) => isSound(problem, cell)) ??
-    seeds.find(({ cell }) => isSound(problem, cell))?.cell ??
-    null
-  );
+  const shorter = distinct(seeds).map(({ cell, rules }) => shortened(cell, rules));
+  const best = Math.min(Infinity, ...shorter.map(perPiece));
+  const cells = [...shorter, ...squeezedCells(seeds, best), ...seeds.map(({ cell }) => cell)];
+  cells.sort((a, b) => perPiece(a) - perPiece(b));
+  return cells.find((cell) => isSound(problem, cell)) ?? null;
 }
-
-const perPiece = ({ periodMm, pieces }: StripCell): number => periodMm / pieces.length;
 
 function rulesFor(problem: NestProblem, shape: Shape, { rot, halfTurns }: Base): StripRules | null {
   const { container, trim = 0 } = problem;
@@ -67,14 +57,9 @@ function seedsFor(shape: Shape, { rot, halfTurns }: Base, rules: StripRules): St
   ].filter(({ periodMm, pieces }) => pieces.length > 0 && periodMm > 1e-6);
 }
 
-interface Seed {
-  cell: StripCell;
-  rules: StripRules;
-}
-
 /** The best seeds of different kinds: numbers of pieces, or lengths that differ clearly. */
-function distinct(seeds: readonly Seed[]): Seed[] {
-  const chosen: Seed[] = [];
+function distinct(seeds: readonly StripSeed[]): StripSeed[] {
+  const chosen: StripSeed[] = [];
   for (const seed of seeds) {
     if (chosen.length === mostShortened) break;
     if (seed.cell.pieces.length > 30) continue;
@@ -92,35 +77,6 @@ function distinct(seeds: readonly Seed[]): Seed[] {
 
 const halfTurnedIn = ({ pieces }: StripCell, { rot }: StripRules): number =>
   pieces.filter((piece) => piece.rot !== rot).length;
-
-const lifts = [0.03, 0.1];
-const stretches = [1, 1.02, 1.05, 1.1, 1.15];
-
-/**
- * Two repeats, the second farther up the strip: then a piece need not lie straight behind another.
- * Lengthened until it can be cut.
- */
-function doubled({ cell: { periodMm, pieces }, rules }: Seed): Seed[] {
-  if (pieces.length > 8) return [];
-  const { minY, maxY } = rules.same.bounds;
-  return lifts.flatMap((share) => {
-    const raised = pieces.map(({ x, y, rot }) => {
-      const [least, most] = rot === rules.rot ? rules.upright : rules.halfTurned;
-      const lift = (share * (maxY - minY)) / 2;
-      return {
-        low: { x, y: Math.max(least, y - lift), rot },
-        high: { x, y: Math.min(most, y + lift), rot },
-      };
-    });
-    for (const stretch of stretches) {
-      const apart = periodMm * stretch;
-      const second = raised.map(({ high }) => ({ ...high, x: high.x + apart }));
-      const cell = { periodMm: 2 * apart, pieces: [...raised.map(({ low }) => low), ...second] };
-      if (cellConflict(cell, rules) < 1e-6) return [{ rules, cell }];
-    }
-    return [];
-  });
-}
 
 function isSound(problem: NestProblem, cell: StripCell): boolean {
   return nestFaults(problem, repeated(cell, problem, 3 * cell.pieces.length)).length === 0;

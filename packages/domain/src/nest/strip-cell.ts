@@ -85,7 +85,7 @@ export function cellConflict({ periodMm, pieces }: StripCell, rules: StripRules)
 }
 
 /** Against a half-turned piece, an upright one lies as its mirror image does. */
-function between(first: NestPlacement, second: NestPlacement, rules: StripRules) {
+export function between(first: NestPlacement, second: NestPlacement, rules: StripRules) {
   const alike = first.rot === second.rot;
   return {
     edges: alike ? rules.same : rules.turned,

@@ -6,15 +6,16 @@ import type { StripCell, StripRules } from './strip-cell.ts';
 
 /** Rows along a strip: the shortest pitch for every number of rows that the width takes. */
 export function rowsAlong(frame: RowFrame, rules: StripRules): StripCell[] {
-  const best = new Map<number, StripCell>();
+  const best = new Map<string, StripCell>();
   const widest = frame.leastPitch * (frame.turnedOverSame ? 2.4 : 1.8);
-  const steps = 48;
+  const steps = 32;
   for (let at = 0; at <= steps; at += 1) {
     const pitch = frame.leastPitch + ((widest - frame.leastPitch) * at) / steps;
     const curves = rowCurves(frame, pitch);
     for (const cell of [...stackedAlike(curves, rules), ...stackedTurned(curves, rules)]) {
-      const known = best.get(cell.pieces.length);
-      if (!known || cell.periodMm < known.periodMm) best.set(cell.pieces.length, cell);
+      const kind = cell.pieces.map(({ rot }) => rot).join(' ');
+      const known = best.get(kind);
+      if (!known || cell.periodMm < known.periodMm) best.set(kind, cell);
     }
   }
   return [...best.values()];
@@ -91,7 +92,7 @@ export function rowsAcross(frame: RowFrame, rules: StripRules): StripCell[] {
   const room = roomOf(rules.upright);
   if (room < 0) return [];
   const cells: StripCell[] = [];
-  for (const pitch of pitchesFor(frame.leastPitch, room, 40, frame.turnedOverSame !== null)) {
+  for (const pitch of pitchesFor(frame.leastPitch, room, 16, frame.turnedOverSame !== null)) {
     const curves = rowCurves(frame, pitch);
     cells.push(...acrossAlike(curves, rules), ...acrossTurned(curves, rules));
   }
@@ -146,7 +147,7 @@ function* acrossTurned(curves: RowCurves, rules: StripRules): Generator<StripCel
   for (const [first, second] of alternatingShifts(curves, 4)) {
     shifts.push(first - offset, -second - offset);
   }
-  for (let at = 1; at < 24; at += 1) shifts.push((pitch * at) / 24);
+  for (let at = 1; at < 12; at += 1) shifts.push((pitch * at) / 12);
   for (const shift of shifts) {
     const start = ((shift % pitch) + pitch) % pitch;
     for (const [low, high] of [
