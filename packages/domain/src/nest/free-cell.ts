@@ -32,10 +32,15 @@ export class Edges {
     const ends = this.#ends;
     let least = Infinity;
     for (let at = 0; at < ends.length; at += 4) {
-      const [x0, y0] = [(ends[at] as number) - x, (ends[at + 1] as number) - y];
-      const [dx, dy] = [(ends[at + 2] as number) - x - x0, (ends[at + 3] as number) - y - y0];
-      const share = Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / (dx * dx + dy * dy)));
-      least = Math.min(least, (x0 + share * dx) ** 2 + (y0 + share * dy) ** 2);
+      const x0 = (ends[at] as number) - x;
+      const y0 = (ends[at + 1] as number) - y;
+      const dx = (ends[at + 2] as number) - x - x0;
+      const dy = (ends[at + 3] as number) - y - y0;
+      const along = -(x0 * dx + y0 * dy) / (dx * dx + dy * dy);
+      const share = along < 0 ? 0 : along > 1 ? 1 : along;
+      const ex = x0 + share * dx;
+      const ey = y0 + share * dy;
+      least = Math.min(least, ex * ex + ey * ey);
     }
     return Math.sqrt(least);
   }
@@ -51,7 +56,8 @@ export class Edges {
     const ends = this.#ends;
     let inside = false;
     for (let at = 0; at < ends.length; at += 4) {
-      const [y0, y1] = [(ends[at + 1] as number) - y, (ends[at + 3] as number) - y];
+      const y0 = (ends[at + 1] as number) - y;
+      const y1 = (ends[at + 3] as number) - y;
       if (y0 > 0 === y1 > 0) continue;
       const x0 = (ends[at] as number) - x;
       if (x0 - (y0 / (y1 - y0)) * ((ends[at + 2] as number) - x - x0) > 0) inside = !inside;
@@ -67,47 +73,59 @@ export class Edges {
 
   /** A convex part of what is free around a point outside: as half planes, within the given reach. */
   freeCell(x: number, y: number, reach: number): HalfPlane[] {
-    const near = this.#near(x, y, reach);
     const cell: HalfPlane[] = [];
-    for (const { at } of near) {
-      const ends = this.#clipped(at, x, y, reach);
-      const shut = cell.some(({ nx, ny, d }) =>
-        ends.every((end) => nx * end.x + ny * end.y <= d + 1e-9),
-      );
-      if (!shut) cell.push(this.#separating(at, x, y));
+    for (const { at } of this.#near(x, y, reach)) {
+      if (!this.#isShut(at, x, y, reach, cell)) cell.push(this.#separating(at, x, y));
     }
     return cell;
+  }
+
+  /** Whether all of an edge that is within reach already lies behind one of the half planes. */
+  #isShut(at: number, x: number, y: number, reach: number, cell: readonly HalfPlane[]): boolean {
+    if (cell.length === 0) return false;
+    const ends = this.#ends;
+    const x0 = ends[at] as number;
+    const y0 = ends[at + 1] as number;
+    const dx = (ends[at + 2] as number) - x0;
+    const dy = (ends[at + 3] as number) - y0;
+    const long = Math.sqrt(dx * dx + dy * dy);
+    const middle = ((x - x0) * dx + (y - y0) * dy) / long;
+    const from = Math.max(0, middle - reach) / long;
+    const to = Math.min(long, middle + reach) / long;
+    for (const { nx, ny, d } of cell) {
+      const start = nx * (x0 + from * dx) + ny * (y0 + from * dy);
+      const end = nx * (x0 + to * dx) + ny * (y0 + to * dy);
+      if (start <= d + 1e-9 && end <= d + 1e-9) return true;
+    }
+    return false;
   }
 
   #near(x: number, y: number, reach: number): { at: number; far: number; beyond: number }[] {
     const ends = this.#ends;
     const near: { at: number; far: number; beyond: number }[] = [];
+    const most = reach * reach;
     for (let at = 0; at < ends.length; at += 4) {
-      const [x0, y0] = [(ends[at] as number) - x, (ends[at + 1] as number) - y];
-      const [x1, y1] = [(ends[at + 2] as number) - x, (ends[at + 3] as number) - y];
+      const x0 = (ends[at] as number) - x;
+      const x1 = (ends[at + 2] as number) - x;
       if ((x0 > reach && x1 > reach) || (x0 < -reach && x1 < -reach)) continue;
+      const y0 = (ends[at + 1] as number) - y;
+      const y1 = (ends[at + 3] as number) - y;
       if ((y0 > reach && y1 > reach) || (y0 < -reach && y1 < -reach)) continue;
-      const [dx, dy] = [x1 - x0, y1 - y0];
-      const long = Math.hypot(dx, dy);
-      const share = Math.min(1, Math.max(0, -(x0 * dx + y0 * dy) / (long * long)));
-      const far = Math.hypot(x0 + share * dx, y0 + share * dy);
+      const dx = x1 - x0;
+      const dy = y1 - y0;
+      const squared = dx * dx + dy * dy;
+      const along = -(x0 * dx + y0 * dy) / squared;
+      const share = along < 0 ? 0 : along > 1 ? 1 : along;
+      const ex = x0 + share * dx;
+      const ey = y0 + share * dy;
+      const far = ex * ex + ey * ey;
+      if (far >= most) continue;
       // On the right-hand side of a counter-clockwise edge it is free.
-      if (far < reach) near.push({ at, far, beyond: (x0 * dy - y0 * dx) / -long });
+      near.push({ at, far: Math.sqrt(far), beyond: (y0 * dx - x0 * dy) / Math.sqrt(squared) });
     }
     return near.sort((a, b) =>
       Math.abs(a.far - b.far) < 1e-7 ? b.beyond - a.beyond : a.far - b.far,
     );
-  }
-
-  #clipped(at: number, x: number, y: number, reach: number): Point[] {
-    const ends = this.#ends;
-    const [x0, y0] = [ends[at] as number, ends[at + 1] as number];
-    const [dx, dy] = [(ends[at + 2] as number) - x0, (ends[at + 3] as number) - y0];
-    const long = Math.hypot(dx, dy);
-    const middle = ((x - x0) * dx + (y - y0) * dy) / long;
-    const from = Math.max(0, middle - reach) / long;
-    const to = Math.min(long, middle + reach) / long;
-    return [from, to].map((share) => ({ x: x0 + share * dx, y: y0 + share * dy }));
   }
 
   #lineOf(at: number): HalfPlane {

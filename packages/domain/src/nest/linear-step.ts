@@ -98,8 +98,8 @@ function leavingRow({ rows, columns }: Table, column: number): number {
 
 function pivot({ rows, columns }: Table, row: number, column: number): void {
   const line = rows[row] as Float64Array;
-  const factor = line[column] as number;
-  for (let at = 0; at <= columns; at += 1) line[at] = (line[at] as number) / factor;
+  const factor = 1 / (line[column] as number);
+  for (let at = 0; at <= columns; at += 1) line[at] = (line[at] as number) * factor;
   for (const other of rows) {
     if (other === line) continue;
     const times = other[column] as number;

@@ -74,12 +74,15 @@ function mixedRows(problem: NestProblem, shape: Shape, patterned: Laid): Laid {
 }
 
 const effort = { seeds: 48, kept: 12 };
+/** Strips use the dense patterns for their density alone. */
+const stripEffort = { seeds: 40, kept: 5 };
 
 /** Dense patterns of what may be turned how. */
-export function patternsFor({ rotations }: NestProblem, shape: Shape): Pattern[] {
+export function patternsFor({ rotations, container }: NestProblem, shape: Shape): Pattern[] {
   const bases = basesOf(rotations, shape.symmetrical);
   const halfTurns = bases === null || bases.some((base) => base.halfTurns);
-  return densePatterns(halfTurns ? shape.noFit : { ...shape.noFit, turned: null }, effort);
+  const looked = container.type === 'strip' ? stripEffort : effort;
+  return densePatterns(halfTurns ? shape.noFit : { ...shape.noFit, turned: null }, looked);
 }
 
 function planStrip(problem: NestProblem, shape: Shape, patterns: readonly Pattern[]): RegularPlan {

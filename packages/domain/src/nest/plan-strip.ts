@@ -13,6 +13,10 @@ import { freeBases } from './free-bases.ts';
 
 /** How many of the most promising patterns are shortened. */
 const mostShortened = 5;
+/** Repeats of more pieces are left as they are, and of long ones only the two best are shortened. */
+const [mostPieces, manyPieces] = [30, 12];
+
+const isLong = ({ cell }: StripSeed): boolean => cell.pieces.length > manyPieces;
 
 /** The pattern that takes the least strip per piece; null where no piece fits across the strip. */
 export function bestStripCell(
@@ -62,7 +66,8 @@ function distinct(seeds: readonly StripSeed[]): StripSeed[] {
   const chosen: StripSeed[] = [];
   for (const seed of seeds) {
     if (chosen.length === mostShortened) break;
-    if (seed.cell.pieces.length > 30) continue;
+    if (seed.cell.pieces.length > mostPieces) continue;
+    if (isLong(seed) && chosen.filter(isLong).length === 2) continue;
     const alike = chosen.some(
       ({ cell, rules }) =>
         rules.rot === seed.rules.rot &&

@@ -16,7 +16,7 @@ export function partedCell(cell: StripCell, rules: StripRules): StripCell | null
     const next = oneStep(best, rules, reach, worst);
     const left = next ? cellConflict(next, rules) : Infinity;
     if (next && left < worst) {
-      if (left > clearMm && round > 5 && left > 0.9 * worst) return null;
+      if (left > clearMm && round > 3 && left > 0.85 * worst) return null;
       [best, worst] = [next, left];
     } else reach /= 3;
   }

@@ -8,7 +8,7 @@ import type { StripCell, StripRules } from './strip-cell.ts';
 export function rowsAlong(frame: RowFrame, rules: StripRules): StripCell[] {
   const best = new Map<string, StripCell>();
   const widest = frame.leastPitch * (frame.turnedOverSame ? 2.4 : 1.8);
-  const steps = 32;
+  const steps = 22;
   for (let at = 0; at <= steps; at += 1) {
     const pitch = frame.leastPitch + ((widest - frame.leastPitch) * at) / steps;
     const curves = rowCurves(frame, pitch);

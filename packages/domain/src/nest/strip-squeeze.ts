@@ -11,7 +11,7 @@ export interface StripSeed {
 
 export const perPiece = ({ periodMm, pieces }: StripCell): number => periodMm / pieces.length;
 
-const tries = 15;
+const tries = 26;
 const [mostKinds, mostPieces] = [3, 5];
 /** How much shorter than the best a try begins. */
 const shorter = 0.995;
@@ -27,7 +27,9 @@ export function squeezedCells(seeds: readonly StripSeed[], best: number): StripC
   const found: StripCell[] = [];
   let least = best;
   for (let turn = 0; turn < tries; turn += 1) {
-    const { cell, rules } = kinds[turn % kinds.length] as StripSeed;
+    // Every third try is for a kind that is less likely to give way.
+    const kind = turn % 3 === 2 ? turn % kinds.length : turn % Math.min(2, kinds.length);
+    const { cell, rules } = kinds[kind] as StripSeed;
     const periodMm = least * shorter * 2 * cell.pieces.length;
     const apart = partedCell({ periodMm, pieces: shaken(cell, rules, periodMm, chance) }, rules);
     if (!apart) continue;
@@ -46,7 +48,9 @@ function kindsOf(seeds: readonly StripSeed[], best: number): StripSeed[] {
     const kind = seed.cell.pieces.map(({ rot }) => rot).join(' ');
     if (!kinds.has(kind)) kinds.set(kind, seed);
   }
-  return [...kinds.values()].slice(0, mostKinds);
+  const mixed = ({ cell }: StripSeed) =>
+    new Set(cell.pieces.map(({ rot }) => rot)).size > 1 ? 0 : 1;
+  return [...kinds.values()].slice(0, mostKinds).sort((a, b) => mixed(a) - mixed(b));
 }
 
 function shaken(

@@ -4,7 +4,7 @@ import type { StepCurve } from './step-curve.ts';
 import type { StripCell, StripRules } from './strip-cell.ts';
 import { oppositeRows, type UnitRow, unitCurve, unitRows } from './unit-rows.ts';
 
-const lifts = 14;
+const lifts = 9;
 
 /** Rows along a strip in which every other piece is half turned, as many as the width takes. */
 export function unitsAlong(frame: RowFrame, rules: StripRules): StripCell[] {
