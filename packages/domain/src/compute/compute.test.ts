@@ -15,6 +15,22 @@ describe('compute', () => {
     ['round', { value: 2.5, places: 0, mode: 'halfEven' }, { value: 2 }],
     ['convert', { value: 8, from: 'oz', to: 'mm' }, { value: 3.175 }],
     ['convert', { value: '1', from: 'ft2', to: 'dm2' }, { value: 9.290304 }],
+    [
+      'layout',
+      {
+        id: 'two bars',
+        outline: [
+          [0, 0],
+          [40, 0],
+          [40, 10],
+          [0, 10],
+        ],
+        container: { type: 'rect', w: 40, h: 20 },
+        gap: 0,
+        rotations: [0],
+      },
+      { id: 'two bars', placements: [{ rot: 0 }, { rot: 0 }], utilisation: 1 },
+    ],
   ])('%s answers %j', (name, input, answer) => {
     expect(compute(name, input)).toMatchObject(answer);
   });
@@ -38,6 +54,8 @@ describe('compute', () => {
     ['cut-count', { good: 10, rate: 0.9, confidence: 0.95, sure: true }, 'Leave out sure'],
     ['allocate', { amount: '1.00', weights: [] }, 'at least one entry'],
     ['allocate', { amount: '1.00', weights: ['x'] }, 'weights.0'],
+    ['layout', { outline: [[0, 0], [1]] }, 'Give outline.1 as [x, y]'],
+    ['layout', { outline: [], container: { type: 'disc' } }, 'rect, strip or polygon'],
     ['convert', { value: 1, from: 'ft', to: 'mm' }, 'Give from as one of'],
     ['convert', { value: 1, from: 'ft2', to: 'mm' }, 'choose two units of the same kind'],
   ])('%s refuses %j', (name, input, sentence) => {

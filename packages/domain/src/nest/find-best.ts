@@ -12,6 +12,8 @@ import { parted } from './squeeze.ts';
 
 export interface BestSearch {
   seedPlan: RegularPlan;
+  /** other layouts to begin from, as from `packRectangles`; those that cannot be cut are passed over */
+  alsoFrom?: readonly (readonly NestPlacement[])[];
   /** how long to look, in tries to bring in one more piece; never by the clock */
   budget?: number;
   onProgress?: (share: number, pieces: number) => void;
@@ -28,11 +30,14 @@ const mostParted = 60;
  */
 export function findBest(given: NestProblem, search: BestSearch): NestPlacement[] {
   const { container } = given;
-  const { placements } = search.seedPlan;
+  const placements: readonly NestPlacement[] = search.seedPlan.placements;
   if (container.type === 'strip') return placements.slice(0, container.qty);
-  if (placements.length === 0) return placements;
+  const start = [...(search.alsoFrom ?? [])]
+    .filter((layout) => nestFaults(given, layout).length === 0)
+    .reduce((most, layout) => (layout.length > most.length ? layout : most), placements);
+  if (start.length === 0) return [];
   const { problem, asGiven, asCentred } = centred(given);
-  return bestFrom(problem, placements.map(asCentred), search).map(asGiven);
+  return bestFrom(problem, start.map(asCentred), search).map(asGiven);
 }
 
 function bestFrom(

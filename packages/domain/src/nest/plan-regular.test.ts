@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Point } from '../outline/outline.ts';
-import { nestBounds } from './bounds.ts';
+import { nestBounds, nestWastes } from './bounds.ts';
 import { nestFaults } from './nest-faults.ts';
 import { anOutlineRing, aPanelProblem } from './nest.arbitrary.ts';
 import { planRegular } from './plan-regular.ts';
@@ -150,6 +150,25 @@ describe('a regular plan', () => {
     expect(pieces).toBeGreaterThanOrEqual(18);
     expect(pieces).toBeLessThanOrEqual(21);
     expect(pieces).toBeGreaterThan(count({ ...panel, rotations: [0] }));
+  });
+
+  it('says where the rest of the panel goes', () => {
+    const outline = [
+      { x: 0, y: 0 },
+      { x: 40, y: 0 },
+      { x: 0, y: 30 },
+    ];
+    const problem: NestProblem = {
+      outline,
+      container: { type: 'rect', w: 100, h: 100 },
+      gap: 0,
+      rotations: [0],
+    };
+    const plan = planRegular(problem);
+    const wastes = nestWastes(problem, plan)!;
+    expect(wastes.perCellMm2).toBeGreaterThan(0);
+    const cells = plan.placements.length * (600 + wastes.perCellMm2);
+    expect(wastes.edgesMm2).toBeCloseTo(Math.max(0, 10_000 - cells), 6);
   });
 
   it('is honest about what does not fit', () => {

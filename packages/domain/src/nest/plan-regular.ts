@@ -1,6 +1,6 @@
 import { centred } from './centred.ts';
 import { checkNestProblem, fitsNowhere } from './check-problem.ts';
-import type { Crystal } from './crystal.ts';
+import { areaPerPiece, type Crystal } from './crystal.ts';
 import { densePatterns, type Pattern } from './dense-patterns.ts';
 import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
@@ -17,6 +17,7 @@ const nothing: RegularPlan = {
   placements: [],
   rows: null,
   planeDensity: 0,
+  cellAreaMm2: null,
   period: null,
   mmPerPiece: null,
 };
@@ -46,7 +47,7 @@ function planCentred(problem: NestProblem): RegularPlan {
   return { ...nothing, ...mixedRows(problem, shape, patterned), planeDensity };
 }
 
-type Laid = Pick<RegularPlan, 'placements' | 'rows'>;
+type Laid = Pick<RegularPlan, 'placements' | 'rows' | 'cellAreaMm2'>;
 
 /** The best repeating pattern that passes a second look. */
 function bestPattern(problem: NestProblem, shape: Shape, patterns: readonly Pattern[]): Laid {
@@ -56,9 +57,10 @@ function bestPattern(problem: NestProblem, shape: Shape, patterns: readonly Patt
   for (const candidate of candidates.kept) {
     const placements = candidates.placements(candidate);
     if (nestFaults(problem, placements).length > 0) continue;
-    return { placements, rows: rowNumbers(candidate.crystal, candidate.rot) };
+    const { crystal, rot } = candidate;
+    return { placements, rows: rowNumbers(crystal, rot), cellAreaMm2: areaPerPiece(crystal) };
   }
-  return { placements: [], rows: null };
+  return { placements: [], rows: null, cellAreaMm2: null };
 }
 
 /** Rows of different kinds one above the other, where a panel gets more from them. */
@@ -70,7 +72,7 @@ function mixedRows(problem: NestProblem, shape: Shape, patterned: Laid): Laid {
   const mix = rowMixes(problem, shape, around, turnsToMix(rotations, shape)).find(
     (layout) => layout.length > most && nestFaults(problem, layout).length === 0,
   );
-  return mix ? { placements: mix, rows: mixNumbers(mix) } : patterned;
+  return mix ? { placements: mix, rows: mixNumbers(mix), cellAreaMm2: null } : patterned;
 }
 
 const effort = { seeds: 48, kept: 12 };
@@ -96,6 +98,7 @@ function planStrip(problem: NestProblem, shape: Shape, patterns: readonly Patter
     placements: repeated(cell, problem, Math.max(asked, least)),
     rows: stripRows(cell),
     planeDensity: 0,
+    cellAreaMm2: null,
     period,
     mmPerPiece: period.mm / period.pieces,
   };

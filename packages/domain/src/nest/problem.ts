@@ -61,6 +61,8 @@ export interface RegularPlan {
   rows: RowNumbers | null;
   /** share of the plane that the densest pattern found for this outline covers; 0 if none was sought */
   planeDensity: number;
+  /** area that each piece takes of the repeating pattern, in mm²; null where rows differ */
+  cellAreaMm2: number | null;
   /** strip only */
   period: StripPeriod | null;
   /** strip only: length of strip per piece in the middle of a long strip */
