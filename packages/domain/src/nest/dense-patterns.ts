@@ -1,3 +1,4 @@
+import { deepestConflict } from './crystal-faults.ts';
 import { areaPerPiece, type Crystal, turnedCrystal } from './crystal.ts';
 import { type NoFitPair, rowFrame } from './row-frame.ts';
 import {
@@ -19,6 +20,10 @@ export interface Pattern {
 }
 
 const directions = 60;
+/** Patterns whose pieces reach deeper into each other, in mm, are left out. */
+const soundMm = 1e-5;
+/** The same for a first look, in shares of a piece's size. */
+const roughShare = 0.01;
 
 /**
  * Patterns of little area per piece, densest first: straight and alternating rows in some 60
@@ -36,11 +41,14 @@ export function densePatterns(
     patternsAt(coarse, (180 * at) / directions),
   ).flat();
   const [roughly, exactly] = [clearances(coarse), clearances(noFit)];
-  const rough = distinct(seeds.sort(byArea), effort.seeds, 1e-4).map(({ crystal }) =>
-    patternOf(tightened(crystal, roughly)),
-  );
+  const rough = distinct(seeds.sort(byArea), effort.seeds, 1e-4)
+    .map(({ crystal }) => patternOf(tightened(crystal, roughly)))
+    .filter(({ crystal, areaMm2 }) => {
+      return deepestConflict(crystal, coarse) < roughShare * Math.sqrt(areaMm2);
+    });
   return distinct(rough.sort(byArea), effort.kept, 1e-5)
     .map(({ crystal }) => patternOf(tightened(crystal, exactly)))
+    .filter(({ crystal }) => deepestConflict(crystal, noFit) < soundMm)
     .sort(byArea);
 }
 

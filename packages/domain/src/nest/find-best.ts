@@ -1,4 +1,5 @@
 import { panelSeeds } from './best-seeds.ts';
+import { nestBounds } from './bounds.ts';
 import { centred } from './centred.ts';
 import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
@@ -20,7 +21,7 @@ export interface BestSearch {
   shouldStop?: () => boolean;
 }
 
-const usualBudget = 120;
+const usualBudget = 200;
 /** Layouts of more pieces are not parted as a whole. */
 const mostParted = 60;
 
@@ -54,10 +55,11 @@ function bestFrom(
     container.type === 'rect' && holes.length === 0
       ? panelLayouts(problem, shape, around, seed, rots)
       : [seed];
+  const bound = nestBounds(problem).pieces ?? Infinity;
   const share = Math.ceil(triesFor(search, seed.length) / seeds.length);
   let best = seed;
   for (const layout of seeds) {
-    const found = searchMore(layout, rots, around, { ...search, budget: share });
+    const found = searchMore(layout, rots, around, { ...search, budget: share, bound });
     if (found.length > best.length && nestFaults(problem, found).length === 0) best = found;
   }
   return best;

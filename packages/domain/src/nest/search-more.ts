@@ -6,6 +6,8 @@ import { parted } from './squeeze.ts';
 
 export interface SearchEffort {
   budget: number;
+  /** no layout has more pieces */
+  bound: number;
   onProgress?: (share: number, pieces: number) => void;
   shouldStop?: () => boolean;
 }
@@ -19,13 +21,13 @@ export function searchMore(
   seed: readonly NestPlacement[],
   rots: readonly number[],
   around: Surroundings,
-  { budget, onProgress, shouldStop }: SearchEffort,
+  { budget, bound, onProgress, shouldStop }: SearchEffort,
 ): NestPlacement[] {
   const chance = seeded(11);
   let layout = [...seed];
   let places: Place[] = [];
   for (let turn = 0; turn < budget; turn += 1) {
-    if (shouldStop?.()) break;
+    if (layout.length >= bound || shouldStop?.()) break;
     onProgress?.(turn / budget, layout.length);
     if (places.length === 0) places = likelyPlaces(layout, rots, around, chance);
     const place = places.shift();
