@@ -85,10 +85,10 @@ export class PhaseSearch {
     });
   }
 
-  /** Lines through (all but through) the room's corners, if it has few. */
+  /** Lines through (all but through) the room's corners if it has few, else through small parts. */
   #corners(): number[] {
     return this.#members.flatMap((edges) => {
-      if (edges.length > 4 * 8) return [];
+      if (edges.length > 4 * 8) return linesThroughSmall(edges);
       return Array.from(
         { length: edges.length / 4 },
         (_, at) => edges[at * 4 + 1] as number,
@@ -125,6 +125,27 @@ export class PhaseSearch {
     const { gain, u } = mostAtOnce(starts.subarray(0, left).sort(), ends.subarray(0, right).sort());
     return { count: base + gain, u, v };
   }
+}
+
+/** Parts of a room lower than this, in steps, could be missed by lines that are spread evenly. */
+const small = 0.6;
+
+/** Lines low, in the middle and high through every closed part of a room that is small. */
+function linesThroughSmall(edges: Edges): number[] {
+  const lines: number[] = [];
+  let [low, high] = [Infinity, -Infinity];
+  for (let at = 0; at < edges.length; at += 4) {
+    low = Math.min(low, edges[at + 1] as number);
+    high = Math.max(high, edges[at + 1] as number);
+    const isLast =
+      at + 4 >= edges.length || edges[at + 4] !== edges[at + 2] || edges[at + 5] !== edges[at + 3];
+    if (!isLast) continue;
+    if (high - low < small) {
+      for (const share of [0.02, 0.2, 0.5, 0.8, 0.98]) lines.push(low + share * (high - low));
+    }
+    [low, high] = [Infinity, -Infinity];
+  }
+  return lines;
 }
 
 /** In shares of a step: within what the room is drawn larger by. */

@@ -44,8 +44,10 @@ export function panelPool(
       for (const seed of rowSeeds(problem, shape, base, axis, effort)) consider(seed, 0);
     }
   }
+  // Free pieces already lie with some pattern's rows along an edge.
+  const slanting = problem.rotations === 'free' ? patterns.slice(0, 3) : patterns;
   for (const { rot, halfTurns } of bases) {
-    for (const { crystal } of patterns) {
+    for (const { crystal } of slanting) {
       if (crystal.members.length > 1 && !halfTurns) continue;
       consider({ crystal: turnedCrystal(crystal, rot), rot }, tries);
     }
@@ -54,7 +56,7 @@ export function panelPool(
 }
 
 const effortFor = (rotations: Rotations): RowEffort =>
-  rotations === 'free' ? { pitches: 10, shifts: 2 } : { pitches: 24, shifts: 4 };
+  rotations === 'free' ? { pitches: 8, shifts: 2 } : { pitches: 24, shifts: 4 };
 
 function* rowSeeds(
   { container, trim = 0 }: NestProblem,

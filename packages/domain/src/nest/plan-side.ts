@@ -12,7 +12,8 @@ import { tightened } from './tighten.ts';
 /** Lines of a pattern to look along at first, and for what has given most. */
 const [firstTries, lastTries] = [24, 240];
 const variations = 80;
-const angles = 8;
+/** Angles tried where any is allowed; more where only a few pieces lie. */
+const [angles, manyAngles, fewPieces] = [8, 32, 20];
 /** How strongly variations are pulled away from the densest, in shares of a piece's size. */
 const pulls = [0.03, 0.1, 0.2];
 
@@ -24,12 +25,12 @@ export function sideCandidates(
   patterns: readonly Pattern[],
 ): Candidates {
   const candidates = new Candidates(room, shape.noFit);
-  const bases = basesOf(rotations, shape.symmetrical) ?? anyAngle(shape);
+  const bases = basesOf(rotations, shape.symmetrical) ?? anyAngle(shape, room);
   const consider = (crystal: Crystal, { rot, halfTurns }: Base) => {
     if (crystal.members.length > 1 && !halfTurns) return;
     candidates.consider(turnedCrystal(crystal, rot), rot, firstTries);
   };
-  const looked = rotations === 'free' ? patterns.slice(0, 4) : patterns;
+  const looked = rotations === 'free' && bases.length <= angles ? patterns.slice(0, 4) : patterns;
   for (const base of bases) for (const { crystal } of looked) consider(crystal, base);
   const perBase = Math.ceil(variations / bases.length);
   for (const base of bases) {
@@ -45,10 +46,11 @@ export function sideCandidates(
 }
 
 /** Angles spread over those that differ for this outline. */
-function anyAngle(shape: Shape): Base[] {
+function anyAngle(shape: Shape, room: Room): Base[] {
   const period = rotationPeriod(shape);
-  return Array.from({ length: angles }, (_, at) => ({
-    rot: (at * period) / angles,
+  const most = room.areaMm2 < fewPieces * shape.areaMm2 ? manyAngles : angles;
+  return Array.from({ length: most }, (_, at) => ({
+    rot: (at * period) / most,
     halfTurns: !shape.symmetrical,
   }));
 }

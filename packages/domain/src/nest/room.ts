@@ -27,6 +27,11 @@ export class Room {
     this.#flaws = grown(holes.map(counterClockwise), flawClearance);
   }
 
+  /** Area of the container within its trim, flaws and all. */
+  get areaMm2(): number {
+    return this.#container.reduce((sum, ring) => sum + signedArea(ring), 0);
+  }
+
   /** The region, counter-clockwise outside and clockwise holes, a slack larger than what fits. */
   free(rot: number): readonly Ring[] {
     const known = this.#free.get(rot);
