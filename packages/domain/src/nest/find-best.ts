@@ -5,6 +5,7 @@ import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
 import { patternsFor } from './plan-regular.ts';
 import type { NestPlacement, NestProblem, RegularPlan } from './problem.ts';
+import { rectangleLayout } from './rectangle-layout.ts';
 import { Room } from './room.ts';
 import { rowMixes, turnsToMix } from './row-mixes.ts';
 import { searchMore } from './search-more.ts';
@@ -13,8 +14,6 @@ import { parted } from './squeeze.ts';
 
 export interface BestSearch {
   seedPlan: RegularPlan;
-  /** other layouts to begin from, as from `packRectangles`; those that cannot be cut are passed over */
-  alsoFrom?: readonly (readonly NestPlacement[])[];
   /** how long to look, in tries to bring in one more piece; never by the clock */
   budget?: number;
   onProgress?: (share: number, pieces: number) => void;
@@ -31,14 +30,22 @@ const mostParted = 60;
  */
 export function findBest(given: NestProblem, search: BestSearch): NestPlacement[] {
   const { container } = given;
-  const placements: readonly NestPlacement[] = search.seedPlan.placements;
+  const { placements } = search.seedPlan;
   if (container.type === 'strip') return placements.slice(0, container.qty);
-  const start = [...(search.alsoFrom ?? [])]
-    .filter((layout) => nestFaults(given, layout).length === 0)
-    .reduce((most, layout) => (layout.length > most.length ? layout : most), placements);
+  const start = moreOf(placements, rectangleLayout(given), given);
   if (start.length === 0) return [];
   const { problem, asGiven, asCentred } = centred(given);
   return bestFrom(problem, start.map(asCentred), search).map(asGiven);
+}
+
+/** Another way's layout, where it gives more and can be cut. */
+function moreOf(
+  placements: NestPlacement[],
+  other: NestPlacement[] | null,
+  problem: NestProblem,
+): NestPlacement[] {
+  if (other === null || other.length <= placements.length) return placements;
+  return nestFaults(problem, other).length === 0 ? other : placements;
 }
 
 function bestFrom(

@@ -15,7 +15,8 @@ import { areaOfContainer, areaOfSide } from './shares.ts';
 export function layOut(input: LayoutInput, watch: Watch = {}): Layout {
   checkLayoutInput(input);
   const { container } = input;
-  const endless = container.form === 'strip' ? planRegular(stripProblem(input, container)) : null;
+  const asStrip = stripProblem(input, container);
+  const endless = container.form === 'strip' ? planRegular(asStrip) : null;
   const period = endless?.period ?? null;
   const strip = {
     container,
@@ -25,7 +26,8 @@ export function layOut(input: LayoutInput, watch: Watch = {}): Layout {
   const area = areaOfContainer(container, period?.mm ?? 0);
   if (endless && container.form === 'strip' && container.lengthMm === undefined) {
     const placements = endless.placements.slice(0, period?.pieces ?? 0);
-    return { ...lieOf(input, area, { rows: endless, placements, anyhow: false }, null), ...strip };
+    const found = { rows: endless, placements, anyhow: false };
+    return { ...lieOf(input, area, asStrip, found), ...strip };
   }
   return { ...layIn(input, area, containerProblem(input, container), watch), ...strip };
 }

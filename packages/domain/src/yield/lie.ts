@@ -1,5 +1,5 @@
 import type { Decimal } from 'decimal.js';
-import { nestBounds } from '../nest/bounds.ts';
+import { nestBounds, nestWastes } from '../nest/bounds.ts';
 import { findBest } from '../nest/find-best.ts';
 import { planRegular } from '../nest/plan-regular.ts';
 import type { NestPlacement, NestProblem, RegularPlan } from '../nest/problem.ts';
@@ -27,25 +27,25 @@ export function layIn(rules: LayRules, area: Decimal, problem: NestProblem, watc
   const best = rules.search === 'best' ? findBest(problem, { seedPlan: rows, ...watch }) : [];
   const anyhow = best.length > rows.placements.length;
   const placements = anyhow ? best : rows.placements;
-  return lieOf(rules, area, { rows, placements, anyhow }, nestBounds(problem).pieces);
+  return lieOf(rules, area, problem, { rows, placements, anyhow });
 }
 
 export function lieOf(
   { outline }: Pick<LayRules, 'outline'>,
   area: Decimal,
+  problem: NestProblem,
   { rows, placements, anyhow }: Found,
-  boundPieces: number | null,
 ): Lie {
   const numbers = anyhow ? null : rows.rows;
   const ordered = inCuttingOrder(placements, numbers?.directionDeg ?? 0);
-  const cellMm2 = numbers && numbers.pitchMm * numbers.rowStepMm;
+  const wastes = anyhow ? null : nestWastes(problem, rows);
   return {
     by: anyhow ? 'best found' : 'rows',
     pieces: ordered.length,
     placements: ordered,
     ...arrangement(numbers, ordered),
-    ...sharesOf(area, outlineArea(outline), ordered.length, cellMm2),
-    boundPieces,
+    ...sharesOf(area, outlineArea(outline), ordered.length, wastes),
+    boundPieces: nestBounds(problem).pieces,
     piecesInRows: anyhow ? rows.placements.length : null,
   };
 }

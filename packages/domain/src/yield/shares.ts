@@ -1,4 +1,5 @@
 import type { Decimal } from 'decimal.js';
+import type { NestWastes } from '../nest/bounds.ts';
 import { Exact, toAtMost } from '../numbers/decimal-text.ts';
 import { type DrawnSide, drawnAreaMm2 } from '../leather/drawn-side.ts';
 import type { Container, Lie } from './layout.ts';
@@ -33,16 +34,16 @@ export function sharesOf(
   area: Decimal,
   pieceAreaMm2: number,
   pieces: number,
-  cellMm2: number | null,
+  wastes: NestWastes | null,
 ): Shares {
-  const known = cellMm2 !== null && pieces > 0;
   return {
     containerAreaMm2: toAtMost(area, 3),
     pieceAreaMm2: toAtMost(new Exact(pieceAreaMm2), 3),
     yieldPercent: area.isZero() ? '0' : percent(pieceAreaMm2 * pieces, area),
     areaPerPieceMm2: pieces === 0 ? null : toAtMost(area.div(pieces), 3),
-    wasteBetweenPercent: known ? atLeastZero(1 - pieceAreaMm2 / cellMm2) : null,
-    edgeWastePercent: known ? atLeastZero(1 - (cellMm2 * pieces) / area.toNumber()) : null,
+    wasteBetweenPercent:
+      wastes && atLeastZero(wastes.perCellMm2 / (wastes.perCellMm2 + pieceAreaMm2)),
+    edgeWastePercent: wastes && atLeastZero(wastes.edgesMm2 / area.toNumber()),
   };
 }
 
