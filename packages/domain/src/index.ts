@@ -8,6 +8,7 @@ export {
   toText,
 } from './numbers/decimal-text.ts';
 export type { DecimalText, Limits } from './numbers/decimal-text.ts';
+export { normalLoss, normalQuantile } from './numbers/normal.ts';
 
 export * from './units/measures.ts';
 export * from './units/convert.ts';
@@ -19,6 +20,9 @@ export * from './money/allocate.ts';
 export * from './money/currencies.ts';
 export * from './money/amounts.ts';
 export * from './money/invoice-totals.ts';
+export * from './money/present-value.ts';
+export * from './money/payback.ts';
+export * from './money/creditor-reference.ts';
 
 export * from './outline/outline.ts';
 export { checkOutline } from './outline/check-outline.ts';
@@ -62,22 +66,38 @@ export type * from './nest/rectangles.ts';
 
 export * from './rejects/cut-count.ts';
 export * from './rejects/allowance.ts';
+export * from './rejects/interval.ts';
+export { chanceOfEnough } from './rejects/chance.ts';
 
 export * from './work/work-plan.ts';
 export * from './work/bench-minutes.ts';
+export * from './work/flow-time.ts';
+export * from './work/learning.ts';
+
+export * from './tooling/plate-choice.ts';
 
 export type * from './costing/run-input.ts';
 export type { CostKind, CostLine, RunCost } from './costing/cost-run.ts';
 export type * from './pricing/run-numbers.ts';
 export { priceRun } from './pricing/price-run.ts';
+export { priceInversions, priceRises } from './pricing/price-breaks.ts';
+export type { PriceBreak, PriceInversion } from './pricing/price-breaks.ts';
 
 export * from './stock/check-run.ts';
 export { chooseLots } from './stock/choose-lots.ts';
 export type { FreeLot, LotTake } from './stock/choose-lots.ts';
+export * from './stock/order-quantity.ts';
+export * from './stock/production-lot.ts';
+export * from './stock/reorder-point.ts';
+export * from './stock/forecast.ts';
+export * from './stock/stock-cost.ts';
+export * from './stock/available-to-promise.ts';
 
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';
 export * from './promise/bench-plan.ts';
+export * from './promise/late-jobs.ts';
+export * from './promise/two-machine.ts';
 
 export * from './compare/compare-run.ts';
 export { compute, computeNames } from './compute/compute.ts';

@@ -1,0 +1,88 @@
+import type { Decimal } from 'decimal.js';
+import { InvalidInput } from '../errors/domain-error.ts';
+import { type DecimalText, Exact, readDecimal, toPlaces } from '../numbers/decimal-text.ts';
+
+export type CostMethod = 'fifo' | 'movingAverage';
+
+/** Quantities above 0, in any unit; the unit cost 0 or more. */
+export type CostedMovement = { in: DecimalText; unitCost: DecimalText } | { out: DecimalText };
+
+export interface StockCost {
+  /** of everything taken, 2 places */
+  costOfGoods: DecimalText;
+  /** of what is left, 2 places; together with the cost of goods it is what all receipts cost */
+  value: DecimalText;
+}
+
+interface Layer {
+  quantity: Decimal;
+  cost: Decimal;
+}
+
+/**
+ * What was taken from stock cost, and what the rest is worth, movement by movement (perpetual). By
+ * `fifo` the oldest receipt is taken first; by `movingAverage` each receipt makes a new average of
+ * all that is there. Nothing is rounded on the way; the cost of goods is rounded half up at the end,
+ * and the value is the rest of the rounded receipts, so that no cent is lost.
+ * @throws InvalidInput where more is taken than is there
+ */
+export function stockCost(movements: readonly CostedMovement[], method: CostMethod): StockCost {
+  let layers: Layer[] = [];
+  let [received, taken] = [new Exact(0), new Exact(0)];
+  for (const [at, movement] of movements.entries()) {
+    if ('in' in movement) {
+      const layer = readLayer(movement, at);
+      received = received.plus(layer.cost);
+      layers = method === 'fifo' ? [...layers, layer] : [merge([...layers, layer])];
+    } else {
+      const out = readQuantity(movement.out, `movements.${at}.out`);
+      checkEnough(layers, out, at);
+      taken = taken.plus(takeFrom(layers, out));
+    }
+  }
+  const costOfGoods = toPlaces(taken, 2);
+  return { costOfGoods, value: toPlaces(new Exact(toPlaces(received, 2)).minus(costOfGoods), 2) };
+}
+
+function readLayer(receipt: { in: DecimalText; unitCost: DecimalText }, at: number): Layer {
+  const quantity = readQuantity(receipt.in, `movements.${at}.in`);
+  const unitCost = readDecimal(receipt.unitCost, `movements.${at}.unitCost`, { min: 0 });
+  return { quantity, cost: unitCost.times(quantity) };
+}
+
+function readQuantity(text: DecimalText, field: string): Decimal {
+  const quantity = readDecimal(text, field, { min: 0 });
+  if (quantity.isZero()) throw new InvalidInput(field, `Write ${field} as a quantity above 0.`);
+  return quantity;
+}
+
+function merge(layers: readonly Layer[]): Layer {
+  return layers.reduce((all, { quantity, cost }) => ({
+    quantity: all.quantity.plus(quantity),
+    cost: all.cost.plus(cost),
+  }));
+}
+
+function checkEnough(layers: readonly Layer[], out: Decimal, at: number): void {
+  const there = layers.reduce((sum, { quantity }) => sum.plus(quantity), new Exact(0));
+  if (out.gt(there)) {
+    throw new InvalidInput(
+      `movements.${at}.out`,
+      `Movement ${at + 1} takes ${out.toFixed()}, and ${there.toFixed()} are there: take less, or receive first.`,
+    );
+  }
+}
+
+/** Takes from the oldest layers, and says what it cost. */
+function takeFrom(layers: Layer[], out: Decimal): Decimal {
+  let [left, cost] = [out, new Exact(0)];
+  for (let oldest = layers[0]; oldest && left.gt(0); oldest = layers[0]) {
+    const whole = left.gte(oldest.quantity);
+    const part = whole ? oldest.cost : oldest.cost.times(left).div(oldest.quantity);
+    cost = cost.plus(part);
+    const rest = { quantity: oldest.quantity.minus(left), cost: oldest.cost.minus(part) };
+    left = left.minus(oldest.quantity);
+    layers.splice(0, 1, ...(whole ? [] : [rest]));
+  }
+  return cost;
+}
