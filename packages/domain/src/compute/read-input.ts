@@ -47,7 +47,10 @@ export class InputReader {
   text(name: string): string {
     const value = this.any(name);
     if (typeof value !== 'string' || value.trim() === '') {
-      throw new InvalidInput(this.#path(name), `Give ${this.#path(name)} as text that is not blank.`);
+      throw new InvalidInput(
+        this.#path(name),
+        `Give ${this.#path(name)} as text that is not blank.`,
+      );
     }
     return value;
   }
