@@ -12,7 +12,7 @@ function run(name: string, input: string) {
   return { status, stdout, stderr };
 }
 
-// Values: sources in cut-count.test.ts and units.test.ts.
+// Values: sources in cut-count.test.ts, units.test.ts and stockroom.test.ts.
 describe('the compute command', { timeout: 60_000 }, () => {
   it('prints one JSON object', () => {
     const { status, stdout } = run('cut-count', '{"good":100,"rate":0.95,"confidence":0.95}');
@@ -21,6 +21,8 @@ describe('the compute command', { timeout: 60_000 }, () => {
     expect(JSON.parse(run('convert', '{"value":8,"from":"oz","to":"mm"}').stdout)).toEqual({
       value: 3.175,
     });
+    const asked = '{"demand":1000,"orderCost":"10.00","holdingCost":"0.50"}';
+    expect(JSON.parse(run('eoq', asked).stdout)).toEqual({ quantity: 200, annualCost: '100.00' });
   });
 
   it.each([
@@ -28,6 +30,9 @@ describe('the compute command', { timeout: 60_000 }, () => {
     ['round', '{"value":"NaN","places":2,"mode":"halfUp"}'],
     ['round', 'not JSON'],
     ['cut-count', '{"good":100,"rate":0,"confidence":0.95}'],
+    ['eoq', '{"demand":-1,"orderCost":"10.00","holdingCost":"0.50"}'],
+    ['two-machine', '{"jobs":[]}'],
+    ['creditor-reference', '{"text":"RF262320","country":"any"}'],
   ])('ends with 2 and a sentence for %s %s', (name, input) => {
     const { status, stdout, stderr } = run(name, input);
     expect([status, stdout]).toEqual([2, '']);

@@ -22,6 +22,18 @@ describe('cut counts', { timeout: 60_000 }, () => {
     expect(plan.historyRows.length).toBeGreaterThan(15);
   });
 
+  // Chances of the same source, beside some rows of the beta-binomial table.
+  it.each([
+    [9, 10, 10, 0.9580609632162924],
+    [9, 10, 100, 0.9521863588632524],
+    [19, 20, 24, 0.9532596216375676],
+    [19, 20, 100, 0.9525503225266182],
+  ])('from %i good of %i, %i are enough with %f', (goodBefore, total, good, probability) => {
+    const history = { good: goodBefore, total };
+    const cut = cutCount({ good, history, confidence: 0.95 });
+    expect(cut.probability).toBeCloseTo(probability, 10);
+  });
+
   // Second opinion: jstat 1.9.6, binomial distribution by the incomplete beta function.
   it('agree with a statistics library, on other values than the tables', () => {
     for (const good of [3, 17, 61, 133, 333, 777]) {

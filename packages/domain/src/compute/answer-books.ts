@@ -26,7 +26,11 @@ export const bookAnswers: Answers = {
   convert(input) {
     const read = new InputReader(input, ['value', 'from', 'to']);
     const [from, to] = [readUnit(read, 'from'), readUnit(read, 'to')];
-    return { value: convert(read.decimal('value'), from, to).toNumber() };
+    const value = read.decimal('value');
+    if (value.startsWith('-')) {
+      throw new InvalidInput('value', 'An area or a thickness is 0 or more: leave out the minus.');
+    }
+    return { value: convert(value, from, to).toNumber() };
   },
 };
 

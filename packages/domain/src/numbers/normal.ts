@@ -14,8 +14,12 @@ export function normalDensity(z: number): number {
  * φ(z) / (z + 1/(z + 2/(z + 3/(z + …)))); both from memory (Abramowitz and Stegun 26.2.11, 26.2.14).
  */
 export function normalAbove(z: number): number {
-  if (z < 0) return 1 - normalAbove(-z);
-  return z < tailFrom ? 0.5 - normalDensity(z) * middleSeries(z) : normalDensity(z) / fraction(z);
+  return z < 0 ? 1 - normalAbove(-z) : millsRatio(z) * normalDensity(z);
+}
+
+/** (1 − Φ(z)) / φ(z) for z ≥ 0: never too small for a floating point number. */
+function millsRatio(z: number): number {
+  return z < tailFrom ? 0.5 / normalDensity(z) - middleSeries(z) : 1 / fraction(z);
 }
 
 function middleSeries(z: number): number {
@@ -36,17 +40,19 @@ function fraction(z: number): number {
 
 /**
  * z with Φ(z) = share: the normal quantile, to about 14 digits. Newton's method on the logarithm of
- * the tail, which is concave, so that every step after the first comes from the same side.
+ * the tail, which is concave: from above the answer, since 1 − Φ(z) < e^(−z²/2) / 2, every step
+ * comes closer from the same side.
  * @param share above 0, below 1
  * @throws InvalidInput
  */
 export function normalQuantile(share: number, field = 'share'): number {
   readNumber(share, field, { above: 0, below: 1 });
-  const tail = Math.min(share, 1 - share);
-  let z = 0;
+  const logTail = Math.log(Math.min(share, 1 - share));
+  let z = Math.sqrt(Math.max(0, -2 * (logTail + Math.LN2)));
   for (let step = 0; step < 100; step += 1) {
-    const above = normalAbove(z);
-    const change = (Math.log(above / tail) * above) / normalDensity(z);
+    const mills = millsRatio(z);
+    const logAbove = Math.log(mills) - (z * z + Math.log(2 * Math.PI)) / 2;
+    const change = (logAbove - logTail) * mills;
     z += change;
     if (Math.abs(change) < 1e-15 * (1 + z)) break;
   }
