@@ -1,11 +1,12 @@
 import { paybackYears } from '../money/payback.ts';
 import { presentValue } from '../money/present-value.ts';
-import { type PriceBreak, priceInversions, priceRises } from '../pricing/price-breaks.ts';
+import { priceInversions, priceRises } from '../pricing/price-breaks.ts';
 import { choosePlate, type PlateOffer } from '../tooling/plate-choice.ts';
 import { flowTime } from '../work/flow-time.ts';
 import { learnedTime } from '../work/learning.ts';
 import type { Answers } from './answers.ts';
 import { asDecimal, asNumber, InputReader } from './read-input.ts';
+import { asPriceBreak } from './read-price-break.ts';
 
 /** The numbers of a run. */
 export const runAnswers: Answers = {
@@ -50,9 +51,4 @@ function asPlate(value: unknown, field: string): PlateOffer {
     life: read.number('life'),
     ...(read.has('used') && { used: read.number('used') }),
   };
-}
-
-export function asPriceBreak(value: unknown, field: string): PriceBreak {
-  const read = new InputReader(value, ['from', 'price'], field);
-  return { from: read.number('from'), price: read.decimal('price') };
 }

@@ -4,9 +4,9 @@ import { crostonForecast, smoothedUse } from '../stock/forecast.ts';
 import { orderQuantity } from '../stock/order-quantity.ts';
 import { reorderPoint } from '../stock/reorder-point.ts';
 import { type CostedMovement, stockCost } from '../stock/stock-cost.ts';
-import { asPriceBreak } from './answer-run.ts';
 import type { Answers } from './answers.ts';
 import { asNumber, InputReader } from './read-input.ts';
+import { asPriceBreak } from './read-price-break.ts';
 
 export const stockAnswers: Answers = {
   eoq: answerEoq,

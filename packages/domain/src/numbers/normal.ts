@@ -4,7 +4,7 @@ import { readNumber } from './read-number.ts';
 const tailFrom = 3;
 
 /** φ(z), the density of the standard normal distribution. */
-export function normalDensity(z: number): number {
+function normalDensity(z: number): number {
   return Math.exp(-(z * z) / 2) / Math.sqrt(2 * Math.PI);
 }
 

@@ -1,12 +1,6 @@
 import type { Decimal } from 'decimal.js';
 import { InvalidInput } from '../errors/domain-error.ts';
-import {
-  type DecimalText,
-  Exact,
-  readDecimal,
-  readWhole,
-  toPlaces,
-} from '../numbers/decimal-text.ts';
+import { type DecimalText, readDecimal, readWhole, toPlaces } from '../numbers/decimal-text.ts';
 
 export interface PlateOffer {
   metal: string;
