@@ -1,0 +1,155 @@
+import type { Role } from '../support/steps.ts';
+
+export interface Screen {
+  /** The file it is drawn to, without role and width. */
+  name: string;
+  path: string;
+}
+
+interface Found {
+  items: { id: number; state?: string }[];
+}
+
+/** Reads as whoever is signed in in the page. */
+export type Read = (address: string) => Promise<Found>;
+
+const everybody: Screen[] = [{ name: 'today', path: '/today' }];
+
+const byRole: Record<Role, Screen[]> = {
+  owner: [
+    { name: 'quotes', path: '/counter/quotes' },
+    { name: 'quote-new', path: '/counter/quotes/new' },
+    { name: 'orders', path: '/counter/orders' },
+    { name: 'customers', path: '/counter/customers' },
+    { name: 'customer-new', path: '/counter/customers/new' },
+    { name: 'patterns', path: '/pattern-room/patterns' },
+    { name: 'pattern-new', path: '/pattern-room/patterns/new' },
+    { name: 'tooling', path: '/pattern-room/tooling' },
+    { name: 'tool-new', path: '/pattern-room/tooling/new' },
+    { name: 'presses', path: '/pattern-room/presses' },
+    { name: 'bench', path: '/bench' },
+    { name: 'leather', path: '/stockroom/leather' },
+    { name: 'lots', path: '/stockroom/lots' },
+    { name: 'hardware', path: '/stockroom/hardware' },
+    { name: 'suppliers', path: '/stockroom/suppliers' },
+    { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
+    { name: 'purchase-order-new', path: '/stockroom/purchase-orders/new' },
+    { name: 'receive', path: '/stockroom/receive' },
+    { name: 'invoices', path: '/books/invoices' },
+    { name: 'office', path: '/office' },
+    { name: 'people', path: '/office/people' },
+    { name: 'log', path: '/office/log' },
+    { name: 'not-found', path: '/nowhere' },
+  ],
+  maker: [
+    { name: 'bench', path: '/bench' },
+    { name: 'patterns', path: '/pattern-room/patterns' },
+    { name: 'tooling', path: '/pattern-room/tooling' },
+    { name: 'leather', path: '/stockroom/leather' },
+    { name: 'lots', path: '/stockroom/lots' },
+    { name: 'hardware', path: '/stockroom/hardware' },
+    { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
+    { name: 'receive', path: '/stockroom/receive' },
+  ],
+  bookkeeper: [
+    { name: 'quotes', path: '/counter/quotes' },
+    { name: 'orders', path: '/counter/orders' },
+    { name: 'customers', path: '/counter/customers' },
+    { name: 'invoices', path: '/books/invoices' },
+    { name: 'owed', path: '/books/owed' },
+    { name: 'payments', path: '/books/payments' },
+    { name: 'sales-sheets', path: '/books/sales-sheets' },
+    { name: 'tax', path: '/books/tax' },
+  ],
+};
+
+/** Lists whose rows have a page of their own: one screen for each state that is there. */
+const lists: { name: string; list: string; page: (id: number) => string; roles: Role[] }[] = [
+  {
+    name: 'quote',
+    list: '/quotes',
+    page: (id) => `/counter/quotes/${id}`,
+    roles: ['owner', 'bookkeeper'],
+  },
+  {
+    name: 'order',
+    list: '/orders',
+    page: (id) => `/counter/orders/${id}`,
+    roles: ['owner', 'bookkeeper'],
+  },
+  { name: 'job', list: '/jobs', page: (id) => `/bench/jobs/${id}`, roles: ['owner', 'maker'] },
+  {
+    name: 'check',
+    list: '/quotes?state=agreed',
+    page: (id) => `/bench/checks/${id}`,
+    roles: ['maker'],
+  },
+  {
+    name: 'customer',
+    list: '/customers',
+    page: (id) => `/counter/customers/${id}`,
+    roles: ['owner'],
+  },
+  {
+    name: 'pattern',
+    list: '/patterns',
+    page: (id) => `/pattern-room/patterns/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'tool',
+    list: '/tools',
+    page: (id) => `/pattern-room/tooling/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'leather-one',
+    list: '/leathers',
+    page: (id) => `/stockroom/leather/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  { name: 'lot', list: '/lots', page: (id) => `/stockroom/lots/${id}`, roles: ['owner', 'maker'] },
+  {
+    name: 'hardware-one',
+    list: '/hardware',
+    page: (id) => `/stockroom/hardware/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'supplier',
+    list: '/suppliers',
+    page: (id) => `/stockroom/suppliers/${id}`,
+    roles: ['owner'],
+  },
+  {
+    name: 'purchase-order',
+    list: '/purchase-orders',
+    page: (id) => `/stockroom/purchase-orders/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'invoice',
+    list: '/invoices',
+    page: (id) => `/books/invoices/${id}`,
+    roles: ['owner', 'bookkeeper'],
+  },
+];
+
+/** Every screen that a role has, in every state that the demo shows. */
+export async function screensOf(role: Role, read: Read): Promise<Screen[]> {
+  const screens = [...everybody, ...byRole[role]];
+  for (const { name, list, page, roles } of lists) {
+    if (!roles.includes(role)) continue;
+    const states = new Map<string, number>();
+    for (const { id, state } of (await read(list)).items) {
+      if (!states.has(state ?? '')) states.set(state ?? '', id);
+    }
+    for (const [state, id] of states) {
+      screens.push({
+        name: [name, state.replaceAll(' ', '-')].filter(Boolean).join('-'),
+        path: page(id),
+      });
+    }
+  }
+  return screens;
+}
