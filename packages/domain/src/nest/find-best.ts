@@ -1,6 +1,7 @@
 import { panelSeeds } from './best-seeds.ts';
 import { nestBounds } from './bounds.ts';
 import { centred } from './centred.ts';
+import { discLayout } from './disc-layout.ts';
 import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
 import { patternsFor } from './plan-regular.ts';
@@ -32,10 +33,12 @@ export function findBest(given: NestProblem, search: BestSearch): NestPlacement[
   const { container } = given;
   const { placements } = search.seedPlan;
   if (container.type === 'strip') return placements.slice(0, container.qty);
-  const start = moreOf(placements, rectangleLayout(given), given);
-  if (start.length === 0) return [];
+  const bound = nestBounds(given).pieces ?? Infinity;
+  const packed = moreOf(placements, rectangleLayout(given), given);
+  const discs = discLayout(given, packed, { ...search, bound });
+  if (packed.length === 0 || discs) return moreOf(packed, discs, given);
   const { problem, asGiven, asCentred } = centred(given);
-  return bestFrom(problem, start.map(asCentred), search).map(asGiven);
+  return bestFrom(problem, packed.map(asCentred), search).map(asGiven);
 }
 
 /** Another way's layout, where it gives more and can be cut. */
