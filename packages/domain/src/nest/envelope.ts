@@ -8,21 +8,39 @@ export type Pieces = readonly number[];
 export function upperEnvelope(pieces: Pieces): number[] {
   const order = byLeftEnd(pieces);
   const stops = stopsOf(pieces);
+  const lines: Lines = { pieces, slopes: slopesOf(pieces), active: [] };
   const found: number[] = [];
-  let active: number[] = [];
   let next = 0;
   for (let at = 0; at + 1 < stops.length; at += 1) {
-    const [left, right] = [stops[at] as number, stops[at + 1] as number];
+    const left = stops[at] as number;
+    const right = stops[at + 1] as number;
     if (right - left < tiny) continue;
-    active = active.filter((piece) => (pieces[piece + 2] as number) > left + tiny);
     while (next < order.length && (pieces[order[next] as number] as number) <= left + tiny) {
-      active.push(order[next] as number);
+      lines.active.push(order[next] as number);
       next += 1;
     }
-    active = active.filter((piece) => (pieces[piece + 2] as number) > left + tiny);
-    if (active.length > 0) climb(pieces, active, left, right, found);
+    dropEnded(lines, left);
+    if (lines.active.length > 0) climb(lines, left, right, found);
   }
   return found;
+}
+
+/** The pieces with their slopes, worked out once, and those that lie over the place at hand. */
+interface Lines {
+  pieces: Pieces;
+  slopes: Float64Array;
+  active: number[];
+}
+
+/** Kept in the same list, since this is done at every stop. */
+function dropEnded({ pieces, active }: Lines, left: number): void {
+  let kept = 0;
+  for (const piece of active) {
+    if ((pieces[piece + 2] as number) <= left + tiny) continue;
+    active[kept] = piece;
+    kept += 1;
+  }
+  active.length = kept;
 }
 
 const tiny = 1e-10;
@@ -39,38 +57,39 @@ function stopsOf(pieces: Pieces): Float64Array {
   return stops.sort();
 }
 
-function slopeOf(pieces: Pieces, at: number): number {
-  const [x0, y0] = [pieces[at] as number, pieces[at + 1] as number];
-  return ((pieces[at + 3] as number) - y0) / ((pieces[at + 2] as number) - x0);
+function slopesOf(pieces: Pieces): Float64Array {
+  const slopes = new Float64Array(pieces.length / 4);
+  for (let at = 0; at < pieces.length; at += 4) slopes[at / 4] = slopeOf(pieces, at);
+  return slopes;
 }
 
-const heightOf = (pieces: Pieces, at: number, x: number): number =>
-  (pieces[at + 1] as number) + slopeOf(pieces, at) * (x - (pieces[at] as number));
+function slopeOf(pieces: Pieces, at: number): number {
+  const rise = (pieces[at + 3] as number) - (pieces[at + 1] as number);
+  return rise / ((pieces[at + 2] as number) - (pieces[at] as number));
+}
+
+const heightOf = ({ pieces, slopes }: Lines, at: number, x: number): number =>
+  (pieces[at + 1] as number) + (slopes[at >> 2] as number) * (x - (pieces[at] as number));
 
 /** Follows the highest piece from left to right and changes to another where it is overtaken. */
-function climb(
-  pieces: Pieces,
-  active: readonly number[],
-  left: number,
-  right: number,
-  found: number[],
-): void {
+function climb(lines: Lines, left: number, right: number, found: number[]): void {
   let x = left;
-  for (let turns = 0; turns <= active.length && x < right - tiny; turns += 1) {
-    const top = highest(pieces, active, x);
-    const end = overtakenAt(pieces, active, top, x, right);
-    append(found, x, heightOf(pieces, top, x), end, heightOf(pieces, top, end));
+  for (let turns = 0; turns <= lines.active.length && x < right - tiny; turns += 1) {
+    const top = highest(lines, x);
+    const end = overtakenAt(lines, top, x, right);
+    append(found, x, heightOf(lines, top, x), end, heightOf(lines, top, end));
     x = end;
   }
 }
 
-function highest(pieces: Pieces, active: readonly number[], x: number): number {
+function highest(lines: Lines, x: number): number {
+  const { active, slopes } = lines;
   let best = active[0] as number;
-  let height = heightOf(pieces, best, x);
+  let height = heightOf(lines, best, x);
   for (const piece of active) {
-    const other = heightOf(pieces, piece, x);
+    const other = heightOf(lines, piece, x);
     if (other < height - 1e-11) continue;
-    if (other > height + 1e-11 || slopeOf(pieces, piece) > slopeOf(pieces, best)) {
+    if (other > height + 1e-11 || (slopes[piece >> 2] as number) > (slopes[best >> 2] as number)) {
       best = piece;
       height = other;
     }
@@ -78,19 +97,14 @@ function highest(pieces: Pieces, active: readonly number[], x: number): number {
   return best;
 }
 
-function overtakenAt(
-  pieces: Pieces,
-  active: readonly number[],
-  top: number,
-  x: number,
-  right: number,
-): number {
-  const [slope, height] = [slopeOf(pieces, top), heightOf(pieces, top, x)];
+function overtakenAt(lines: Lines, top: number, x: number, right: number): number {
+  const slope = lines.slopes[top >> 2] as number;
+  const height = heightOf(lines, top, x);
   let end = right;
-  for (const piece of active) {
-    const steeper = slopeOf(pieces, piece) - slope;
+  for (const piece of lines.active) {
+    const steeper = (lines.slopes[piece >> 2] as number) - slope;
     if (steeper <= 1e-12) continue;
-    const meets = x + (height - heightOf(pieces, piece, x)) / steeper;
+    const meets = x + (height - heightOf(lines, piece, x)) / steeper;
     if (meets > x + tiny && meets < end) end = meets;
   }
   return end;
@@ -100,7 +114,8 @@ function overtakenAt(
 function append(found: number[], x0: number, y0: number, x1: number, y1: number): void {
   const last = found.length - 4;
   if (last >= 0 && Math.abs((found[last + 2] as number) - x0) < tiny) {
-    const straight = heightOf(found, last, x1);
+    const run = x1 - (found[last] as number);
+    const straight = (found[last + 1] as number) + slopeOf(found, last) * run;
     const meets = Math.abs((found[last + 3] as number) - y0) < 1e-9;
     if (meets && Math.abs(straight - y1) < 1e-9) {
       found[last + 2] = x1;
