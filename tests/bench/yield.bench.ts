@@ -23,6 +23,10 @@ interface CaseInFile {
 const runs = { warm: 2, timed: 5 };
 
 function casesOf(file: string): CaseInFile[] {
+  if (!existsSync(file)) {
+    console.error(`There is no file ${file}. Name a file of cases, or none for those kept here.`);
+    process.exit(2);
+  }
   const content = JSON.parse(readFileSync(file, 'utf8')) as { cases: CaseInFile[] } | CaseInFile[];
   return Array.isArray(content) ? content : content.cases;
 }
