@@ -97,6 +97,18 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner', 'maker'],
   },
   {
+    name: 'cut-from',
+    list: '/patterns',
+    page: (id) => `/pattern-room/patterns/${id}/cut-from`,
+    roles: ['owner'],
+  },
+  {
+    name: 'pattern-change',
+    list: '/patterns',
+    page: (id) => `/pattern-room/patterns/${id}/change`,
+    roles: ['owner'],
+  },
+  {
     name: 'tool',
     list: '/tools',
     page: (id) => `/pattern-room/tooling/${id}`,
