@@ -90,8 +90,8 @@ walk('an outline from a drawing: refused, mended, sized, kept, and printed', asy
   await settled(page);
   await page.getByText('drawn, 101.6 × 45.16 mm, 1 hole punched').first().waitFor();
   await expectAccessible(page);
-  expect((await download(page, /PDF/)).subarray(0, 5).toString()).toBe('%PDF-');
-  expect((await download(page, /SVG/)).toString()).toContain('>Room tag<');
+  expect((await download(page, /Template to print/)).subarray(0, 5).toString()).toBe('%PDF-');
+  expect((await download(page, /Template for artwork/)).toString()).toContain('>Room tag<');
 
   // Changed again, it still has its outline without the file.
   await page.getByRole('link', { name: 'Change', exact: true }).click();

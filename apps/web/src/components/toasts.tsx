@@ -29,6 +29,8 @@ function ToastList() {
         <Toast.Action className="min-h-9 rounded px-3 font-semibold text-verdigris hover:bg-verdigris-pale" />
         <Toast.Close
           aria-label="Close"
+          // It can be reached by Tab at any time, so it must not be hidden from the ear.
+          aria-hidden={false}
           className="grid size-9 shrink-0 place-items-center rounded text-ink-soft hover:bg-manila"
         >
           <X size={18} aria-hidden="true" />

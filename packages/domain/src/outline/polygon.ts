@@ -23,7 +23,18 @@ export function outlinePolygon(outline: Outline, toleranceMm = 0.01): Point[] {
     shape.kind === 'ellipse'
       ? ellipsePoints(shape.radiusX, shape.radiusY, toleranceMm)
       : shape.stretches.flatMap((stretch) => stretchPoints(stretch, toleranceMm));
-  return withoutRepeats(points.map(toMicrometre));
+  return withoutHairs(withoutRepeats(points.map(toMicrometre)));
+}
+
+/** Shorter than this in mm, an edge may run back on the one before it: a trace of rounding. */
+const hairMm = 0.003;
+
+/** Leaves out the ends of such edges; the curve moves by no more than their length. */
+function withoutHairs(points: Point[]): Point[] {
+  return points.filter((point, at) => {
+    const before = points[(at + points.length - 1) % points.length] as Point;
+    return Math.hypot(point.x - before.x, point.y - before.y) > hairMm;
+  });
 }
 
 /** The widest step along an arc whose chord leaves it by no more than the tolerance. */

@@ -5,13 +5,7 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import {
-  areaText,
-  countText,
-  lengthText,
-  moneyText,
-  sizeText,
-} from '../../../lib/formatting.ts';
+import { areaText, countText, lengthText, moneyText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 
 type Row = CutAdviceReply['rows'][number];
