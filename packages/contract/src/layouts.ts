@@ -159,10 +159,12 @@ export const lie = {
   pieceAreaMm2: z.string().nullable(),
   yieldPercent: z.string().nullable(),
   areaPerPieceMm2: z.string().nullable(),
-  wasteBetweenPercent: z.string().nullable(),
-  edgeWastePercent: z.string().nullable(),
+  // Layouts that were kept before these were reckoned have none of them.
+  wasteBetweenPercent: z.string().nullable().default(null),
+  edgeWastePercent: z.string().nullable().default(null),
+  offcut: z.object({ x: mm, y: mm, widthMm: mm, heightMm: mm }).nullable().default(null),
   boundPieces: z.int().nullable(),
-  piecesInRows: z.int().nullable(),
+  piecesInRows: z.int().nullable().default(null),
 };
 
 /** How the pieces lie on a panel or strip, as the domain works it out. */

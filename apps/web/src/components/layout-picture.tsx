@@ -22,6 +22,8 @@ interface LayoutPictureProps {
   heightMm: number;
   /** A side as it was drawn, where it is no rectangle. */
   side?: DrawnSide | undefined;
+  /** What is left over and worth keeping. */
+  offcut?: { x: number; y: number; widthMm: number; heightMm: number } | null | undefined;
   /** Straight cuts that part it into strips for the press. */
   cuts?: StripCuts | undefined;
   /** How many pieces the spoilage allowance will cost: the last ones are hatched. */
@@ -44,6 +46,7 @@ export function LayoutPicture(props: LayoutPictureProps) {
     spine = 'across',
     side,
     cuts,
+    offcut,
     title,
   } = props;
   const { lengthUnit } = useWorkshop();
@@ -84,6 +87,7 @@ export function LayoutPicture(props: LayoutPictureProps) {
               vectorEffect="non-scaling-stroke"
             />
           )}
+          {offcut && <OffcutMark offcut={offcut} />}
           {placements.map((placement, index) => (
             <LayoutPiece
               key={index}
@@ -102,6 +106,21 @@ export function LayoutPicture(props: LayoutPictureProps) {
         <SpineArrow spine={spine} />
       </figcaption>
     </figure>
+  );
+}
+
+function OffcutMark({ offcut }: { offcut: NonNullable<LayoutPictureProps['offcut']> }) {
+  return (
+    <rect
+      x={offcut.x}
+      y={offcut.y}
+      width={offcut.widthMm}
+      height={offcut.heightMm}
+      className="fill-verdigris-pale/60 stroke-verdigris"
+      strokeWidth={1.5}
+      strokeDasharray="5 3"
+      vectorEffect="non-scaling-stroke"
+    />
   );
 }
 

@@ -1,17 +1,17 @@
 import type { LayoutReply } from '@hidewright/contract';
-import { countText, lengthText } from '../lib/formatting.ts';
+import { countText, lengthText, sizeText } from '../lib/formatting.ts';
 import type { Workshop } from '../lib/workshop.tsx';
 import type { KeyFigure } from './key-figures.tsx';
 
 type Rows = Pick<
   LayoutReply,
-  'pitchMm' | 'rowStepMm' | 'shiftMm' | 'rows' | 'piecesPerRow' | 'period'
+  'pitchMm' | 'rowStepMm' | 'shiftMm' | 'rows' | 'piecesPerRow' | 'period' | 'offcut'
 >;
 
-/** The numbers by which a hand places the die: pitch, row step, shift, rows; and the pull of a strip. */
+/** The numbers by which a hand places the die: pitch, row step, shift, rows, the pull of a strip; and what is left. */
 export function rowFigures(layout: Rows, unit: Workshop['lengthUnit']): KeyFigure[] {
   const mm = (value: number) => lengthText(value.toFixed(4), unit, unit === 'mm' ? 1 : 3);
-  const { pitchMm, rowStepMm, shiftMm, rows, piecesPerRow, period } = layout;
+  const { pitchMm, rowStepMm, shiftMm, rows, piecesPerRow, period, offcut } = layout;
   const figures: (KeyFigure | false)[] = [
     pitchMm !== null &&
       rowStepMm !== null && {
@@ -26,6 +26,11 @@ export function rowFigures(layout: Rows, unit: Workshop['lengthUnit']): KeyFigur
         figure: countText(rows),
         note: `of up to ${countText(piecesPerRow)}`,
       },
+    offcut !== null && {
+      word: 'goes back',
+      figure: sizeText(offcut.widthMm.toFixed(0), offcut.heightMm.toFixed(0), unit),
+      note: 'the largest piece left, dashed',
+    },
     period !== null && {
       word: 'pull the strip',
       figure: mm(period.mm),

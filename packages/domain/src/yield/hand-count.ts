@@ -36,6 +36,7 @@ export function handCount({
     areaPerPieceMm2: toAtMost(area.div(pieces), 3),
     wasteBetweenPercent: null,
     edgeWastePercent: null,
+    offcut: null,
     boundPieces: null,
     piecesInRows: null,
     mmPerPiece: null,

@@ -172,6 +172,16 @@ describe('a layout on a strip', { timeout: 300_000 }, () => {
   });
 });
 
+it('says what is left that is worth keeping', () => {
+  const outline: Outline = { shape: 'rectangle', widthMm: 100, heightMm: 100, cornerRadiusMm: 0 };
+  const rules = { outline, spacingMm: 0, trimMm: 0 };
+  const { offcut, pieces } = layOut({ ...rules, container: panel(290, 100) });
+  expect(pieces).toBe(2);
+  expect(offcut?.widthMm).toBeGreaterThan(85);
+  expect(offcut?.widthMm).toBeLessThanOrEqual(90 + 1e-6);
+  expect(layOut({ ...rules, container: panel(230, 100) }).offcut).toBeNull();
+});
+
 it('says where the leather goes: the pieces, the waste between them, and the edges', () => {
   const outline: Outline = { shape: 'round', diameterMm: 50 };
   const layout = layOut({ outline, spacingMm: 0, trimMm: 0, container: panel(1000, 1000) });

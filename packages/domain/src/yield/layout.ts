@@ -1,6 +1,7 @@
 import type { DecimalText } from '../numbers/decimal-text.ts';
 import type { DrawnSide } from '../leather/drawn-side.ts';
 import type { Outline } from '../outline/outline.ts';
+import type { Offcut } from './offcut.ts';
 
 /** What is cut from, in mm: a panel, or a strip, which has no end unless a length is given. */
 export type Container =
@@ -86,6 +87,8 @@ export interface Lie {
   wasteBetweenPercent: DecimalText | null;
   /** waste along the edges and flaws: what no cell covers, as a per cent of the container */
   edgeWastePercent: DecimalText | null;
+  /** the largest upright rectangle left over, where it is worth keeping; null where none is */
+  offcut: Offcut | null;
   /** no layout of any kind gives more than this */
   boundPieces: number | null;
   /** what rows would give, where more was found another way */

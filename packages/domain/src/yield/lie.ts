@@ -1,11 +1,15 @@
 import type { Decimal } from 'decimal.js';
 import { nestBounds, nestWastes } from '../nest/bounds.ts';
 import { findBest } from '../nest/find-best.ts';
+import { placed } from '../nest/placed.ts';
 import { planRegular } from '../nest/plan-regular.ts';
 import type { NestPlacement, NestProblem, RegularPlan } from '../nest/problem.ts';
+import type { Ring } from '../outline/ring.ts';
 import { outlineArea } from '../outline/measure.ts';
 import { arrangement, inCuttingOrder } from './arrangement.ts';
 import type { LayRules, Lie } from './layout.ts';
+import { intoCorner } from './into-corner.ts';
+import { largestOffcut, type Offcut } from './offcut.ts';
 import { sharesOf } from './shares.ts';
 
 /** Told now and then while the best is looked for, so that a person can watch and stop it. */
@@ -26,7 +30,7 @@ export function layIn(rules: LayRules, area: Decimal, problem: NestProblem, watc
   const rows = planRegular(problem);
   const best = rules.search === 'best' ? findBest(problem, { seedPlan: rows, ...watch }) : [];
   const anyhow = best.length > rows.placements.length;
-  const placements = anyhow ? best : rows.placements;
+  const placements = intoCorner(problem, anyhow ? best : rows.placements);
   return lieOf(rules, area, problem, { rows, placements, anyhow });
 }
 
@@ -45,7 +49,29 @@ export function lieOf(
     placements: ordered,
     ...arrangement(numbers, ordered),
     ...sharesOf(area, outlineArea(outline), ordered.length, wastes),
+    offcut: offcutOf(problem, ordered),
     boundPieces: nestBounds(problem).pieces,
     piecesInRows: anyhow ? rows.placements.length : null,
   };
+}
+
+/** Smaller than this on a side, in mm, an offcut is not worth a place on the rack. Common practice, no source. */
+const worthKeepingMm = 40;
+
+function offcutOf(problem: NestProblem, placements: readonly NestPlacement[]): Offcut | null {
+  const { container, outline, holes = [] } = problem;
+  if (container.type === 'strip' || placements.length === 0) return null;
+  const taken = placements.map((placement) => placed(outline, placement));
+  return largestOffcut(edgeOf(container), [...taken, ...holes], worthKeepingMm);
+}
+
+function edgeOf(container: Exclude<NestProblem['container'], { type: 'strip' }>): Ring {
+  if (container.type === 'polygon') return container.points;
+  const { w, h } = container;
+  return [
+    { x: 0, y: 0 },
+    { x: w, y: 0 },
+    { x: w, y: h },
+    { x: 0, y: h },
+  ];
 }

@@ -28,6 +28,7 @@ export function JobLayout({ job }: { job: Job }) {
             placements={layout.placements}
             widthMm={width}
             heightMm={height}
+            offcut={layout.offcut}
             title={`Layout of ${job.patternName}`}
           />
           <div className="mt-4">

@@ -59,6 +59,7 @@ function Laid({ laid }: { laid: LotLayout }) {
         placements={laid.placements.map((each) => ({ ...each, ...moved(each) }))}
         widthMm={width}
         heightMm={height}
+        offcut={laid.offcut && { ...laid.offcut, ...moved(laid.offcut) }}
         side={{
           outline: laid.side.outline.map(moved),
           flaws: laid.side.flaws.map((flaw) => flaw.map(moved)),

@@ -34,6 +34,7 @@ export function LayoutDrawing({ layout, outlinePath, name, cuts }: LayoutDrawing
           widthMm={widthMm}
           heightMm={heightMm}
           cuts={cuts}
+          offcut={layout.offcut}
         />
       )}
       <KeyFigures figures={layoutFigures(layout, workshop)} />

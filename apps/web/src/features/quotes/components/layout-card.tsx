@@ -37,6 +37,7 @@ export function LayoutCard({ layout, outlinePath, patternName, rung }: LayoutCar
           placements={layout.placements}
           widthMm={widthMm}
           heightMm={heightMm}
+          offcut={layout.offcut}
           allowance={rung ? allowanceOf(rung, layout) : 0}
         />
       )}
