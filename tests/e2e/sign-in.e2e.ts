@@ -1,7 +1,8 @@
 import { afterAll, beforeAll } from 'vitest';
 import { closeBrowser } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
-import { expectAccessible, walk } from '../support/walk.ts';
+import { settled } from '../support/steps.ts';
+import { expectAccessible, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
@@ -13,11 +14,11 @@ afterAll(async () => {
 });
 
 walk('the owner signs in and lands on Today', async ({ page }) => {
-  await page.goto(hidewright.url);
-  await expectAccessible(page);
+  await visit(page, hidewright.url);
   await page.getByLabel(/e-mail/i).fill('owner@example.com');
   await page.getByLabel(/password/i).fill('marlpit-by-the-fen');
   await page.getByRole('button', { name: 'Sign in', exact: true }).click();
   await page.waitForURL('**/today');
+  await settled(page);
   await expectAccessible(page);
 });
