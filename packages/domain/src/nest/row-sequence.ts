@@ -84,7 +84,8 @@ interface State {
   before: number;
 }
 
-const mostStacks = 4;
+/** So many stacks of one count, and so many counts: rows further apart are not looked at, and some of the highest cannot be cut. */
+const [mostStacks, mostCounts] = [4, 4];
 
 /** For every count and last row the lowest stack; the stacks with the most pieces, as row numbers. */
 function bestStacks(
@@ -110,14 +111,16 @@ function bestStacks(
       });
     });
   }
-  return ends(states, rows).slice(0, mostStacks);
+  return ends(states, rows);
 }
 
 function ends(states: readonly (State | undefined)[][], rows: readonly Row[]): number[][] {
   const stacks: number[][] = [];
-  for (let count = states.length - 1; count > 0 && stacks.length < mostStacks; count -= 1) {
+  const lowest = Math.max(1, states.length - mostCounts);
+  for (let count = states.length - 1; count >= lowest; count -= 1) {
+    const full = stacks.length + mostStacks;
     states[count]?.forEach((state, last) => {
-      if (!state) return;
+      if (!state || stacks.length >= full) return;
       const stack: number[] = [];
       for (let [left, row] = [count, last]; row >= 0;) {
         stack.unshift(row);

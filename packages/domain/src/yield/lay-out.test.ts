@@ -71,6 +71,21 @@ describe('a layout on a panel', { timeout: 300_000 }, () => {
     );
   });
 
+  it('gives the rows of a smaller panel where higher stacks of rows cannot be cut', () => {
+    const outline: Outline = {
+      shape: 'tag',
+      lengthMm: 83.25,
+      widthMm: 53,
+      neckLengthMm: 54.1125,
+      neckWidthMm: 45.05,
+      cornerRadiusMm: 0,
+    };
+    const pieces = [panel(148.5, 193), panel(150.5, 195)].map(
+      (container) => layOut({ outline, spacingMm: 1, trimMm: 2, container }).pieces,
+    );
+    expect(pieces).toEqual([5, 5]);
+  });
+
   it('never gives more pieces for more spacing', () => {
     fc.assert(
       fc.property(aPanelInput, halves(0, 4), (input, more) => {
