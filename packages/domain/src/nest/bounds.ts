@@ -1,4 +1,4 @@
-import { grown } from './clip.ts';
+import { grown } from '../outline/clip.ts';
 import type { NestProblem, RegularPlan, Ring } from './problem.ts';
 import { counterClockwise, distanceToEdges, isInside, ringBounds, signedArea } from './ring.ts';
 

@@ -1,5 +1,5 @@
 import type { Point } from '../outline/outline.ts';
-import { unionPositive } from './clip.ts';
+import { unionPositive } from '../outline/clip.ts';
 import { cornerAt, signedArea } from './ring.ts';
 import type { Ring } from './problem.ts';
 

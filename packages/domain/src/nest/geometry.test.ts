@@ -8,7 +8,7 @@ import { PhaseSearch } from './phase.ts';
 import { counterClockwise, isInside, mirroredThroughOrigin, shifted, signedArea } from './ring.ts';
 import { seeded } from './seeded.ts';
 import { StepCurve } from './step-curve.ts';
-import { commonArea } from './clip.ts';
+import { commonArea } from '../outline/clip.ts';
 
 const runs = { numRuns: 30, seed: 9 };
 

@@ -1,4 +1,4 @@
-import { grown } from './clip.ts';
+import { grown } from '../outline/clip.ts';
 import { minkowskiSum } from './convolution.ts';
 import { Edges } from './free-cell.ts';
 import type { Pieces } from './envelope.ts';

@@ -1,5 +1,5 @@
 import type { Point } from '../outline/outline.ts';
-import { commonArea, grown } from './clip.ts';
+import { commonArea, grown } from '../outline/clip.ts';
 import { closePairs, placed } from './placed.ts';
 import type { NestPlacement, NestProblem, Ring } from './problem.ts';
 import { counterClockwise, distanceToEdges, isInside, ringBounds, signedArea } from './ring.ts';

@@ -1,5 +1,5 @@
 import type { Point } from '../outline/outline.ts';
-import { grown, unionPositive } from './clip.ts';
+import { grown, unionPositive } from '../outline/clip.ts';
 import { convolution } from './convolution.ts';
 import type { NestProblem, Ring } from './problem.ts';
 import { counterClockwise, mirroredThroughOrigin, ringBounds, signedArea, turned } from './ring.ts';

@@ -1,4 +1,4 @@
-import { grown } from './clip.ts';
+import { grown } from '../outline/clip.ts';
 import { blunted } from './blunted.ts';
 import { minkowskiSum } from './convolution.ts';
 import type { Ring, Rotations } from './problem.ts';

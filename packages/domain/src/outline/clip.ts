@@ -1,6 +1,6 @@
 import { Clipper, EndType, FillRule, JoinType, type Path64, type Paths64 } from 'clipper2-ts';
-import type { Point } from '../outline/outline.ts';
-import type { Ring } from './problem.ts';
+import type { Point } from './outline.ts';
+import type { Ring } from './ring.ts';
 
 /** Whole numbers that clipping works in, per mm: a ten-millionth of a millimetre. */
 const perMm = 1e7;
@@ -17,8 +17,11 @@ export function unionPositive(rings: readonly Ring[]): Point[][] {
   return Clipper.union(rings.map(toPath), FillRule.Positive).map(toRing);
 }
 
-/** The region grown by `mm` with round corners; shrunk where `mm` is negative. */
-export function grown(rings: readonly Ring[], mm: number): Point[][] {
+/**
+ * The region grown by `mm` with round corners, followed within `withinMm`; shrunk where `mm` is
+ * negative. Outer rings run counter-clockwise, holes clockwise.
+ */
+export function grown(rings: readonly Ring[], mm: number, withinMm = arcMm): Point[][] {
   if (mm === 0) return rings.map((ring) => [...ring]);
   const paths: Paths64 = rings.map(toPath);
   return Clipper.inflatePaths(
@@ -27,7 +30,7 @@ export function grown(rings: readonly Ring[], mm: number): Point[][] {
     JoinType.Round,
     EndType.Polygon,
     2,
-    arcMm * perMm,
+    withinMm * perMm,
   ).map(toRing);
 }
 
