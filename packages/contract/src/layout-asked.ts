@@ -1,4 +1,4 @@
-import type { Container, LayoutInput, Outline } from '@hidewright/domain';
+import type { Container, LayoutInput, LayRules, Outline } from '@hidewright/domain';
 import type { LayoutAsked, TypedContainer, TypedOutline } from './layouts.ts';
 
 /** A hand count as the domain takes it. */
@@ -31,14 +31,24 @@ export function layoutSourceOf(asked: LayoutAsked): LayoutSource {
     throw new TypeError('A layout by outline without an outline or a container');
   }
   const input: LayoutInput = {
-    turns: asked.turns,
+    ...layRulesOf(asked, asked.outline),
     ...(asked.layoutBy === 'best found' && { search: 'best' }),
-    outline: outlineOf(asked.outline),
     container: containerOf(asked.container),
-    spacingMm: Number(asked.spacingMm),
-    trimMm: Number(asked.trimMm),
   };
   return { by: 'outline', input };
+}
+
+/** How a pattern's pieces may lie, whatever they are cut from. */
+export function layRulesOf(
+  { turns, spacingMm, trimMm }: Pick<LayoutAsked, 'turns' | 'spacingMm' | 'trimMm'>,
+  drawn: TypedOutline,
+): LayRules {
+  return {
+    outline: outlineOf(drawn),
+    turns,
+    spacingMm: Number(spacingMm),
+    trimMm: Number(trimMm),
+  };
 }
 
 /** The outline as the domain takes it: measures in mm as numbers, since geometry is floating point. */

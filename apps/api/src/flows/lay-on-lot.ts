@@ -1,6 +1,6 @@
 import { outlinePath, type SideInput, type SideLayout } from '@hidewright/domain';
 import {
-  outlineOf,
+  layRulesOf,
   type LotDrawing,
   type LotLayout,
   type PatternDefinition,
@@ -57,10 +57,7 @@ export function sideInputOf(lot: Lot, definition: PatternDefinition): SideInput 
   if (edge === null) return `Draw the edge of ${lot.tag} first.`;
   if (definition.outline === null) return 'This pattern has no outline to lay. Draw one first.';
   return {
-    outline: outlineOf(definition.outline),
-    spacingMm: Number(definition.spacingMm),
-    trimMm: Number(definition.trimMm),
-    turns: definition.turns,
+    ...layRulesOf(definition, definition.outline),
     side: { outline: edge, flaws: lot.flaws as LotDrawing['flaws'] },
   };
 }

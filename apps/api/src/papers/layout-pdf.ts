@@ -10,11 +10,6 @@ import {
   type Paper,
 } from './paper.ts';
 
-interface Point {
-  x: number;
-  y: number;
-}
-
 /** How the pieces lie, for the wall beside the press. All lengths in mm, y running down. */
 export interface LayoutPaper {
   shopName: string;
@@ -27,9 +22,6 @@ export interface LayoutPaper {
   placements: { x: number; y: number; rot: number }[];
   widthMm: number;
   heightMm: number;
-  /** a side's edge and flaws, where it is no rectangle */
-  edge: Point[] | null;
-  flaws: Point[][];
   figures: { word: string; figure: string }[];
 }
 
@@ -60,22 +52,11 @@ export function drawLayout(layout: LayoutPaper): Promise<Uint8Array> {
   return bytesOf(paper);
 }
 
-function drawContainer(paper: Paper, layout: LayoutPaper, scale: number): void {
-  paper
-    .save()
-    .translate(sheet.left, room.top)
-    .scale(scale)
-    .lineWidth(1 / scale);
-  const { edge, widthMm, heightMm } = layout;
-  if (edge === null) paper.rect(0, 0, widthMm, heightMm);
-  else paper.polygon(...edge.map(pair));
-  paper.fillAndStroke('#EAD3B5', '#8C7F63');
-  for (const flaw of layout.flaws)
-    paper.polygon(...flaw.map(pair)).fillAndStroke('#F6DEDC', '#8E1F2B');
+function drawContainer(paper: Paper, { widthMm, heightMm }: LayoutPaper, scale: number): void {
+  paper.save().translate(sheet.left, room.top).lineWidth(1);
+  paper.rect(0, 0, widthMm * scale, heightMm * scale).fillAndStroke('#EAD3B5', '#8C7F63');
   paper.restore();
 }
-
-const pair = ({ x, y }: Point): [number, number] => [x, y];
 
 function drawPiece(
   paper: Paper,

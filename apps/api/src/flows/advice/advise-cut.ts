@@ -7,7 +7,7 @@ import {
   type CutAdvice,
 } from '@hidewright/domain';
 import {
-  layoutSourceOf,
+  layRulesOf,
   type adviseCut as adviseCutEndpoint,
   type BodyOf,
   type CutAdviceReply,
@@ -75,16 +75,9 @@ export async function adviseCut(
 }
 
 function rulesOf(definition: PatternDefinition) {
-  const container = definition.container ?? { form: 'panel' as const, widthMm: '1', heightMm: '1' };
-  if (definition.outline === null) {
-    const message =
-      'This pattern is counted by hand. Draw its outline to compare what to cut from.';
-    throw invalid([{ field: 'outline', message }]);
-  }
-  const source = layoutSourceOf({ ...definition, layoutBy: 'outline', container });
-  if (source.by !== 'outline') throw new TypeError('An outline was asked for.');
-  const { container: _container, search: _search, ...rules } = source.input;
-  return rules;
+  if (definition.outline !== null) return layRulesOf(definition, definition.outline);
+  const message = 'This pattern is counted by hand. Draw its outline to compare what to cut from.';
+  throw invalid([{ field: 'outline', message }]);
 }
 
 function rowOf(

@@ -38,8 +38,6 @@ export function layoutPaperOf({
     placements: layout.placements,
     widthMm,
     heightMm,
-    edge: null,
-    flaws: [],
     figures: figuresOf(layout, definition),
   };
 }
