@@ -3,7 +3,7 @@ import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
-import { settled } from '../support/steps.ts';
+import { openShop, settled } from '../support/steps.ts';
 import { expectAccessible, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
@@ -26,20 +26,10 @@ async function choose(page: Page, name: string, text: string): Promise<void> {
   await page.getByLabel('Drawing', { exact: true }).setInputFiles(file);
 }
 
-async function openShop(page: Page): Promise<void> {
+walk('an outline from a drawing: refused, mended, sized, kept, and printed', async ({ page }) => {
   await page.goto(hidewright.url);
   await settled(page);
-  await page.getByLabel('Name of the shop').fill('A Drawing Bench');
-  await page.getByLabel('Your name').fill('Somebody New');
-  await page.getByLabel('E-mail address').fill('drawing@example.com');
-  await page.getByLabel('Password').fill('five plain words in a row');
-  await page.getByRole('button', { name: 'Open the shop' }).click();
-  await page.waitForURL('**/today');
-  await settled(page);
-}
-
-walk('an outline from a drawing: refused, mended, sized, kept, and printed', async ({ page }) => {
-  await openShop(page);
+  await openShop(page, 'A Drawing Bench');
   await page.goto(`${hidewright.url}/pattern-room/patterns/new`);
   await settled(page);
   await page.getByLabel('Name', { exact: true }).fill('Room tag');

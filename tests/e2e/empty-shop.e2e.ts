@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
-import { settled } from '../support/steps.ts';
+import { openShop, settled } from '../support/steps.ts';
 import { expectAccessible, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
@@ -18,13 +18,7 @@ walk('from an empty shop to a sent quote of an own piece', async ({ page }) => {
   await page.goto(hidewright.url);
   await settled(page);
   await expectAccessible(page);
-  await page.getByLabel('Name of the shop').fill('A Small Bench');
-  await page.getByLabel('Your name').fill('Somebody New');
-  await page.getByLabel('E-mail address').fill('new@example.com');
-  await page.getByLabel('Password').fill('five plain words in a row');
-  await page.getByRole('button', { name: 'Open the shop' }).click();
-  await page.waitForURL('**/today');
-  await settled(page);
+  await openShop(page, 'A Small Bench');
   await expectAccessible(page);
 
   await page.getByRole('link', { name: /New pattern/ }).click();
