@@ -72,14 +72,21 @@ export { chanceOfEnough } from './rejects/chance.ts';
 export * from './work/work-plan.ts';
 export * from './work/bench-minutes.ts';
 export * from './work/flow-time.ts';
+export * from './work/ways-of-working.ts';
 export * from './work/learning.ts';
 
 export * from './tooling/plate-choice.ts';
 
 export type * from './costing/run-input.ts';
-export type { CostKind, CostLine, RunCost } from './costing/cost-run.ts';
+export { hourlyKinds } from './costing/cost-lines.ts';
+export type { CostKind, CostLine } from './costing/cost-lines.ts';
+export type { RunCost } from './costing/cost-run.ts';
+export type { Charge } from './pricing/charges.ts';
 export type * from './pricing/run-numbers.ts';
 export { priceRun } from './pricing/price-run.ts';
+export { quantityThatReaches } from './pricing/quantity-that-reaches.ts';
+export { shakeRun } from './pricing/sensitivity.ts';
+export type { Shake } from './pricing/sensitivity.ts';
 export { priceInversions, priceRises } from './pricing/price-breaks.ts';
 export type { PriceBreak, PriceInversion } from './pricing/price-breaks.ts';
 

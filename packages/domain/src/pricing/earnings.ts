@@ -1,12 +1,14 @@
 import type { Decimal } from 'decimal.js';
-import { isNot, type RunCost, sumOf } from '../costing/cost-run.ts';
+import { type CostLine, CostLines, hourlyKinds, isNot, sumOf } from '../costing/cost-lines.ts';
+import type { RunCost } from '../costing/cost-run.ts';
+import type { RunInput } from '../costing/run-input.ts';
 import { type DecimalText, Exact, toPlaces } from '../numbers/decimal-text.ts';
-import { lineAmount } from '../money/amounts.ts';
+import { type Billed, bill } from './charges.ts';
 
-export interface Earnings {
-  goodsTotal: DecimalText;
-  toolingCharge: DecimalText;
-  total: DecimalText;
+export interface Earnings extends Billed {
+  costLines: CostLine[];
+  /** everything but tooling, over the pieces ordered, 4 places */
+  unitCost: DecimalText;
   marginPercent: DecimalText;
   left: DecimalText;
   perBenchHour: DecimalText;
@@ -15,30 +17,37 @@ export interface Earnings {
 }
 
 /**
- * What a price earns. Per bench hour: the total less everything bought, by bench hours. Per hour
- * all in: the same less all wages, by bench and desk hours. Hourly figures rounded half up to the
- * currency's decimals.
+ * What a price earns. Per bench hour: the total less everything bought, card fees and carriage
+ * included, by bench hours. Per hour all in: the same less wages and overhead, by bench and desk
+ * hours. Hourly figures rounded half up to the currency's decimals.
  */
-export function earn(
-  cost: RunCost,
-  priceEach: DecimalText,
-  toolingCharge: DecimalText,
-  digits: number,
-): Earnings {
-  const goodsTotal = lineAmount(cost.quantity, priceEach, digits);
-  const total = new Exact(goodsTotal).plus(toolingCharge);
-  const left = total.minus(sumOf(cost.costLines, isNot('wages', 'desk')));
-  const profit = total.minus(sumOf(cost.costLines, () => true));
+export function earn(input: RunInput, cost: RunCost, priceEach: DecimalText): Earnings {
+  const digits = input.minorDigits;
+  const billed = bill(input, cost.quantity, priceEach);
+  const costLines = [...cost.costLines, ...cardFee(input, cost.quantity, billed.total)];
+  const total = new Exact(billed.total);
+  const left = total.minus(sumOf(costLines, isNot(...hourlyKinds)));
+  const profit = total.minus(sumOf(costLines, () => true));
   return {
-    goodsTotal,
-    toolingCharge,
-    total: toPlaces(total, digits),
+    ...billed,
+    costLines,
+    unitCost: toPlaces(sumOf(costLines, isNot('tooling')).div(cost.quantity), 4),
     marginPercent: total.isZero() ? '0.0' : toPlaces(profit.div(total).times(100), 1),
     left: toPlaces(left, digits),
     perBenchHour: perHour(left, cost.benchMinutes, digits),
     perHourAllIn: perHour(profit, cost.allMinutes, digits),
     loses: profit.isNegative() && !profit.isZero(),
   };
+}
+
+function cardFee({ cardFee, minorDigits }: RunInput, quantity: number, total: DecimalText) {
+  if (!cardFee) return [];
+  const lines = new CostLines(minorDigits, quantity);
+  const fee = new Exact(total).times(cardFee.percent).div(100).plus(cardFee.each);
+  if (!fee.isZero()) {
+    lines.add('fees', 'Card fees', fee, `${cardFee.percent} % of ${total} and ${cardFee.each}`);
+  }
+  return lines.lines;
 }
 
 const perHour = (amount: Decimal, minutes: DecimalText, digits: number): DecimalText =>

@@ -1,51 +1,91 @@
 import { checkRunInput } from '../costing/check-run-input.ts';
 import { costRun, type RunCost } from '../costing/cost-run.ts';
-import type { RunInput } from '../costing/run-input.ts';
-import { Exact, readDecimal, toText } from '../numbers/decimal-text.ts';
+import type { RunInput, RunOption } from '../costing/run-input.ts';
+import { type DecimalText, Exact, readDecimal, toPlaces, toText } from '../numbers/decimal-text.ts';
 import { earn } from './earnings.ts';
-import { breakWarnings, cheaperFrom, ladderWarnings } from './warnings.ts';
+import { optionBreaks } from './option-breaks.ts';
+import { rulePrice } from './rule-price.ts';
 import type { BreakNumbers, RunNumbers } from './run-numbers.ts';
-import { neverRising, targetPrice, toolingCharge } from './target-price.ts';
+import { neverRising, notBelow, targetPrice } from './target-price.ts';
+import { breakWarnings, cheaperFrom, ladderWarnings } from './warnings.ts';
 
 /**
- * The numbers of a run at each quantity: what to cut, what it costs, which price reaches the
- * target, and what the asked price earns per bench hour and per hour all in.
+ * The numbers of a run at each quantity: what to cut, what it costs, which price keeps the rule, and
+ * what the asked price earns per bench hour and per hour all in; and the same for every option.
  * @throws InvalidInput · NotWorkable
  */
 export function priceRun(input: RunInput): RunNumbers {
   checkRunInput(input);
-  const costs = [...input.breaks]
-    .sort((a, b) => a.quantity - b.quantity)
-    .map(({ quantity, typedPrice }) => ({ cost: costRun(input, quantity), typedPrice }));
-  const suggested = neverRising(costs.map(({ cost }) => targetPrice(input, cost, false)));
-  const rungs = costs.map(({ cost, typedPrice }, at) =>
-    rung(input, cost, suggested[at] as string, typedPrice),
-  );
-  const breaks = rungs.map((each, at) => {
+  const breaks = ladderOf(input, costsOf(input));
+  const options = (input.options ?? []).map((option, at) => ({
+    name: option.name,
+    breaks: optionLadder(input, option, at, breaks),
+  }));
+  return { breaks, options, warnings: ladderWarnings(input, breaks, options) };
+}
+
+function optionLadder(
+  input: RunInput,
+  option: RunOption,
+  at: number,
+  breaks: readonly BreakNumbers[],
+): BreakNumbers[] {
+  const run = { ...input, hardware: option.hardware, options: [] };
+  const costs = costsOf(run);
+  const suggested = option.typedExtra === null ? suggestedPrices(run, costs) : null;
+  return ladderOf({ ...run, breaks: optionBreaks(option, at, breaks, suggested) }, costs);
+}
+
+function ladderOf(input: RunInput, costs: readonly RunCost[]): BreakNumbers[] {
+  const suggested = suggestedPrices(input, costs);
+  const rungs = costs.map((cost, at) => rung(input, cost, suggested[at] as string));
+  return rungs.map((each, at) => {
     const withNext = { ...each, cheaperFrom: cheaperFrom(each, rungs[at + 1]) };
     return { ...withNext, warnings: breakWarnings(input, withNext, rungs[at + 1]) };
   });
-  return { breaks, warnings: ladderWarnings(input, breaks) };
 }
 
-function rung(
-  input: RunInput,
-  cost: RunCost,
-  suggestedPrice: string,
-  typedPrice: string | null,
-): BreakNumbers {
+const costsOf = (input: RunInput): RunCost[] =>
+  input.breaks
+    .map(({ quantity }) => quantity)
+    .sort((a, b) => a - b)
+    .map((quantity) => costRun(input, quantity));
+
+/** By each quantity's own rule or else the run's, never below the floor, never rising. */
+function suggestedPrices(input: RunInput, costs: readonly RunCost[]): DecimalText[] {
+  const prices = costs.map((cost) => {
+    const own = input.breaks.find(({ quantity }) => quantity === cost.quantity)?.rule;
+    const price = rulePrice(input, cost, own ?? input.priceRule ?? { kind: 'target' });
+    return notBelow(input.floorPrice, input.priceStep, price);
+  });
+  return neverRising(prices);
+}
+
+function rung(input: RunInput, cost: RunCost, suggestedPrice: string): BreakNumbers {
+  const typedPrice =
+    input.breaks.find(({ quantity }) => quantity === cost.quantity)?.typedPrice ?? null;
   const priceEach =
     typedPrice === null ? suggestedPrice : toText(readDecimal(typedPrice, 'typedPrice'));
-  const earnings = earn(cost, priceEach, toolingCharge(input), input.minorDigits);
+  const earnings = earn(input, cost, priceEach);
+  const reachesTarget = new Exact(earnings.perBenchHour).gte(input.targetPerHour);
   return {
     ...cost,
     ...earnings,
     suggestedPrice,
     priceEach,
     typed: typedPrice !== null,
-    reachesTarget: new Exact(earnings.perBenchHour).gte(input.targetPerHour),
+    reachesTarget,
     priceThatReachesTarget: targetPrice(input, cost, true),
     cheaperFrom: null,
+    reorderTotal: new Exact(earnings.total)
+      .minus(earnings.toolingCharge)
+      .toFixed(input.minorDigits),
+    resaleMarginPercent: resaleMargin(input.resalePrice, priceEach),
     warnings: [],
   };
+}
+
+function resaleMargin(resale: DecimalText | null | undefined, priceEach: DecimalText) {
+  if (!resale || new Exact(resale).isZero()) return null;
+  return toPlaces(new Exact(resale).minus(priceEach).div(resale).times(100), 1);
 }

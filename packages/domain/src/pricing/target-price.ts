@@ -1,36 +1,43 @@
-import { isNot, type RunCost, sumOf } from '../costing/cost-run.ts';
+import type { Decimal } from 'decimal.js';
+import { hourlyKinds, isNot, sumOf } from '../costing/cost-lines.ts';
+import type { RunCost } from '../costing/cost-run.ts';
 import type { RunInput } from '../costing/run-input.ts';
 import { type DecimalText, Exact, toText } from '../numbers/decimal-text.ts';
+import { toolingCharge } from './charges.ts';
 import { earn } from './earnings.ts';
+import { leastPrice } from './least-price.ts';
 
 /**
  * The smallest multiple of the price step with which an order earns the target per bench hour.
- * With `tooling` false the goods are looked at alone, as if the tooling paid for itself: that is
- * the price to suggest, since tooling never goes into a unit price.
+ * With `tooling` false the pieces are looked at alone, as if the tooling paid for itself and nobody
+ * were in a hurry: that is the price to suggest, since charged once never goes into a unit price.
  */
 export function targetPrice(input: RunInput, cost: RunCost, tooling: boolean): DecimalText {
-  const step = new Exact(input.priceStep);
-  const goods = { ...cost, costLines: cost.costLines.filter(({ kind }) => kind !== 'tooling') };
-  const [order, charge] = tooling ? [cost, toolingCharge(input)] : [goods, '0'];
+  const asked = tooling ? input : withoutExtras(input);
+  const order = tooling ? cost : withoutTooling(cost);
   const wanted = new Exact(input.targetPerHour).times(cost.benchMinutes).div(60);
-  const bought = sumOf(order.costLines, isNot('wages', 'desk'));
-  const exact = wanted.plus(bought).minus(charge).div(cost.quantity);
-  const reaches = (steps: number) => {
-    const earned = earn(order, toText(step.times(steps)), charge, input.minorDigits);
-    return new Exact(earned.perBenchHour).gte(input.targetPerHour);
-  };
-  // Rounding of the line and of the hourly figure can move the exact answer by a step or two.
-  let steps = Math.max(1, exact.div(step).ceil().toNumber());
-  while (!reaches(steps)) steps += 1;
-  while (steps > 1 && reaches(steps - 1)) steps -= 1;
-  return toText(step.times(steps));
+  const bought = sumOf(order.costLines, isNot(...hourlyKinds));
+  const charged = new Exact(toolingCharge(asked))
+    .plus(asked.setUpCharge ?? '0')
+    .plus(asked.carriage?.charge ?? '0');
+  const guess = wanted.plus(bought).minus(charged).div(cost.quantity);
+  return leastPrice(input.priceStep, guess, (price) =>
+    new Exact(earn(asked, order, price).perBenchHour).gte(input.targetPerHour),
+  );
 }
 
-/** What the customer pays for tooling, once. */
-export function toolingCharge(input: RunInput): DecimalText {
-  const sum = input.tooling.reduce((total, { charge }) => total.plus(charge), new Exact(0));
-  return sum.toFixed(input.minorDigits);
-}
+/** The same run without what is charged once for its tools, its hurry, or its smallness. */
+export const withoutExtras = (input: RunInput): RunInput => ({
+  ...input,
+  tooling: [],
+  rushPercent: '0',
+  minimumOrder: '0',
+});
+
+export const withoutTooling = (cost: RunCost): RunCost => ({
+  ...cost,
+  costLines: cost.costLines.filter(({ kind }) => kind !== 'tooling'),
+});
 
 /** Raises each price to the one of the next larger quantity, so that a ladder never rises. */
 export function neverRising(prices: readonly DecimalText[]): DecimalText[] {
@@ -38,3 +45,15 @@ export function neverRising(prices: readonly DecimalText[]): DecimalText[] {
     prices.slice(at).reduce((most, each) => (new Exact(each).gt(most) ? each : most), price),
   );
 }
+
+/** A price brought up to the floor, in whole steps. */
+export function notBelow(
+  floor: DecimalText | null | undefined,
+  step: DecimalText,
+  price: DecimalText,
+) {
+  if (!floor || new Exact(price).gte(floor)) return price;
+  return toText(upToStep(new Exact(floor), step));
+}
+
+const upToStep = (price: Decimal, step: DecimalText): Decimal => price.div(step).ceil().times(step);

@@ -1,8 +1,11 @@
-import { sumOf } from '../costing/cost-run.ts';
+import { sumOf } from '../costing/cost-lines.ts';
+import { hourlyOfPieceRate } from '../costing/cost-hours.ts';
 import type { RunInput } from '../costing/run-input.ts';
 import { unitPriceInFull } from '../money/amounts.ts';
 import { Exact } from '../numbers/decimal-text.ts';
-import type { BreakNumbers } from './run-numbers.ts';
+import type { StepMinutes } from '../work/bench-minutes.ts';
+import { ticketSteps } from '../work/work-plan.ts';
+import type { BreakNumbers, OptionNumbers } from './run-numbers.ts';
 
 /**
  * From how many pieces on the next larger quantity costs less in total: the smallest count below
@@ -38,12 +41,30 @@ export function breakWarnings(
       `Ordering ${next.quantity} costs less in total than ${here.quantity}: raise its price or lower this one.`,
     );
   }
-  return warnings;
+  return [...warnings, ...belowFloor(input, here)];
+}
+
+function belowFloor({ floorPrice, minorDigits }: RunInput, here: BreakNumbers): string[] {
+  if (!floorPrice || new Exact(here.priceEach).gte(floorPrice)) return [];
+  const [price, floor] = [here.priceEach, floorPrice].map((each) =>
+    unitPriceInFull(each, minorDigits),
+  );
+  return [`At ${here.quantity} a piece goes for ${price}, below your floor of ${floor}.`];
 }
 
 /** What to say about the ladder and the order as a whole. */
-export function ladderWarnings(input: RunInput, breaks: readonly BreakNumbers[]): string[] {
-  return [...risingPrices(breaks, input.minorDigits), ...unpaidTooling(input)];
+export function ladderWarnings(
+  input: RunInput,
+  breaks: readonly BreakNumbers[],
+  options: readonly OptionNumbers[],
+): string[] {
+  return [
+    ...risingPrices(breaks, input.minorDigits),
+    ...unpaidTooling(input),
+    ...withoutPrice(input),
+    ...lowWages(input, breaks),
+    ...options.flatMap(weakOption),
+  ];
 }
 
 function risingPrices(breaks: readonly BreakNumbers[], digits: number): string[] {
@@ -65,5 +86,42 @@ function unpaidTooling(input: RunInput): string[] {
   if (unpaid.lte(0)) return [];
   return [
     `The tooling costs ${unpaid.toFixed(input.minorDigits)} more than is charged for it: charge it, or the run pays for it.`,
+  ];
+}
+
+/** Priced all the same, with what has no price counted as nothing. */
+function withoutPrice({ leather, hardware, supplies = [] }: RunInput): string[] {
+  const missing = [
+    ...(new Exact(leather.pricePerFt2).isZero() ? [leather.name] : []),
+    ...[...hardware, ...supplies]
+      .filter(({ unitPrice }) => new Exact(unitPrice).isZero())
+      .map(({ name }) => name),
+  ];
+  return missing.map((name) => `${name} has no price yet and is counted as nothing: enter one.`);
+}
+
+function lowWages(input: RunInput, breaks: readonly BreakNumbers[]): string[] {
+  const least = input.minimumWagePerHour;
+  const [first] = breaks;
+  if (!least || !first || new Exact(least).isZero()) return [];
+  const rule = `below the minimum of ${least} that you entered. The local authority's rules come first.`;
+  const byPiece = ticketSteps(input.work).flatMap((step, at) => {
+    const hourly = hourlyOfPieceRate(step, first.minutesByStep[at] as StepMinutes);
+    if (hourly === null || hourly.gte(least)) return [];
+    return [`${step.name} at ${step.pieceRate} comes to ${hourly.toFixed(2)} an hour, ${rule}`];
+  });
+  const byHour = new Exact(input.wagePerHour).lt(least)
+    ? [`The wage of ${input.wagePerHour} an hour is ${rule}`]
+    : [];
+  return [...byHour, ...byPiece];
+}
+
+function weakOption({ name, breaks }: OptionNumbers): string[] {
+  const losing = breaks.filter(({ loses }) => loses);
+  const missing = breaks.filter(({ loses, reachesTarget }) => !loses && !reachesTarget);
+  const at = (rungs: readonly BreakNumbers[]) => rungs.map(({ quantity }) => quantity).join(', ');
+  return [
+    ...(losing.length > 0 ? [`With ${name} the run loses money at ${at(losing)}.`] : []),
+    ...(missing.length > 0 ? [`With ${name} the target is missed at ${at(missing)}.`] : []),
   ];
 }

@@ -1,0 +1,61 @@
+import type { Decimal } from 'decimal.js';
+import type { RunInput } from '../costing/run-input.ts';
+import { lineAmount } from '../money/amounts.ts';
+import { type DecimalText, Exact, toPlaces } from '../numbers/decimal-text.ts';
+
+export type ChargeKind = 'set-up' | 'rush' | 'minimum' | 'carriage';
+
+/** What the customer pays once, beside the pieces and the tooling. */
+export interface Charge {
+  kind: ChargeKind;
+  name: string;
+  amount: DecimalText;
+}
+
+/** What an order comes to. */
+export interface Billed {
+  goodsTotal: DecimalText;
+  toolingCharge: DecimalText;
+  charges: Charge[];
+  total: DecimalText;
+}
+
+/**
+ * The pieces at their price, tooling and charges as lines of their own. Rush is a share of the goods;
+ * an order below the minimum is brought up to it, tooling and carriage aside.
+ */
+export function bill(input: RunInput, quantity: number, priceEach: DecimalText): Billed {
+  const digits = input.minorDigits;
+  const goodsTotal = lineAmount(quantity, priceEach, digits);
+  const charges = chargesOn(input, new Exact(goodsTotal));
+  const tooling = toolingCharge(input);
+  const total = charges.reduce((sum, { amount }) => sum.plus(amount), new Exact(goodsTotal));
+  return {
+    goodsTotal,
+    toolingCharge: tooling,
+    charges,
+    total: toPlaces(total.plus(tooling), digits),
+  };
+}
+
+function chargesOn(input: RunInput, goods: Decimal): Charge[] {
+  const digits = input.minorDigits;
+  const setUp = new Exact(input.setUpCharge ?? '0');
+  const rush = new Exact(toPlaces(goods.times(input.rushPercent ?? '0').div(100), digits));
+  const missing = new Exact(input.minimumOrder ?? '0').minus(goods).minus(setUp).minus(rush);
+  const all: [ChargeKind, string, Decimal][] = [
+    ['set-up', 'Setting up', setUp],
+    ['rush', 'Rush', rush],
+    ['minimum', 'Up to the minimum order', Exact.max(0, missing)],
+    ['carriage', 'Carriage', new Exact(input.carriage?.charge ?? '0')],
+  ];
+  return all
+    .filter(([, , amount]) => !amount.isZero())
+    .map(([kind, name, amount]) => ({ kind, name, amount: toPlaces(amount, digits) }));
+}
+
+/** What the customer pays for tooling, once. */
+export function toolingCharge(input: RunInput): DecimalText {
+  const sum = input.tooling.reduce((total, { charge }) => total.plus(charge), new Exact(0));
+  return sum.toFixed(input.minorDigits);
+}
