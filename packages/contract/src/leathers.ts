@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import {
+  areaMm2,
   id,
   idParams,
   line,
@@ -9,9 +10,20 @@ import {
   ounces,
   page,
   pageQuery,
+  percent,
   unitPrice,
   version,
 } from './fields.ts';
+
+const leatherForms = [
+  'side',
+  'hide',
+  'back',
+  'bend',
+  'shoulder',
+  'double shoulder',
+  'belly',
+] as const;
 
 const typed = {
   name: line(80, 'Enter a name, such as Oak tan russet 5–6 oz.'),
@@ -22,6 +34,10 @@ const typed = {
   weightHighOz: ounces.nullable(),
   pricePerFt2: unitPrice,
   supplierId: id.nullable(),
+  /** What it is bought as, whole: a side of so much, of which so much can be used. */
+  wholeForm: z.enum(leatherForms, 'Choose a form.').nullable(),
+  wholeAreaMm2: areaMm2.refine((text) => Number(text) >= 1000, 'Enter an area above 0.').nullable(),
+  wholeUsablePercent: percent.refine((text) => Number(text) >= 1, 'Enter a share from 1 to 100 %.'),
 };
 
 export const leather = z
@@ -36,6 +52,9 @@ export const leather = z
     pricePerFt2: confidential(z.string()),
     supplierId: id.nullable(),
     supplierName: z.string().nullable(),
+    wholeForm: z.enum(leatherForms).nullable(),
+    wholeAreaMm2: z.string().nullable(),
+    wholeUsablePercent: z.string(),
     active: z.boolean(),
     /** Of all its lots together. */
     onHandAreaMm2: z.string(),
@@ -81,6 +100,9 @@ export const addLeather = endpoint({
     weightLowOz: typed.weightLowOz.default(null),
     weightHighOz: typed.weightHighOz.default(null),
     supplierId: typed.supplierId.default(null),
+    wholeForm: typed.wholeForm.default(null),
+    wholeAreaMm2: typed.wholeAreaMm2.default(null),
+    wholeUsablePercent: typed.wholeUsablePercent.default('85'),
   }),
   reply: leather,
 });

@@ -96,6 +96,9 @@ export const order = z
     priceEach: confidential(z.string()),
     goodsTotal: confidential(z.string()),
     toolingCharge: confidential(z.string()),
+    /** The option that was agreed; null for the piece as it is. */
+    optionName: z.string().nullable(),
+    charges: confidential(z.array(z.object({ name: z.string(), amount: z.string() }))),
     total: confidential(z.string()),
     inHandsOn: day.nullable(),
     promisedOn: day,
@@ -130,6 +133,7 @@ export const checkQuote = endpoint({
   query: z.strictObject({
     quantity: z.coerce.number('Enter a quantity.').pipe(runQuantity).optional(),
     by: day.optional(),
+    option: z.string().max(60).optional(),
   }),
   reply: runCheck,
 });

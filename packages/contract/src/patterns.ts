@@ -1,13 +1,62 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
-import { id, idParams, instant, line, page, pageQuery, positiveCount, version } from './fields.ts';
+import { confidential } from './confidential.ts';
+import {
+  id,
+  idParams,
+  instant,
+  line,
+  page,
+  pageQuery,
+  percent,
+  positiveCount,
+  unitPrice,
+  version,
+} from './fields.ts';
 import { layout, layoutFields, refineLayoutFields } from './layouts.ts';
 import { workPlan } from './work-plan.ts';
 
+const perPiece = positiveCount.max(1000, 'Enter at most 1,000 for each piece.');
+
 const hardwareLine = z.strictObject({
   hardwareId: id,
-  perPiece: positiveCount.max(1000, 'Enter at most 1,000 for each piece.'),
+  perPiece,
+  /** Needed for every piece that reaches this step, counted from 0; else for the pieces ordered. */
+  fromStep: z.int('Choose a step.').min(0).max(39).nullish(),
+  /** Of the hardware itself that is spoiled. */
+  lossPercent: percent
+    .refine((text) => Number(text) <= 99, 'Enter losses from 0 to 99 %.')
+    .optional(),
 });
+
+const supplyLine = z.strictObject({
+  name: line(60, 'Enter what is used up, such as edge dye.'),
+  /** What it costs for each piece, for 100 pieces, or for the run. */
+  cost: confidential(unitPrice),
+  per: z.enum(['piece', 'hundred', 'run'], 'Choose what it is counted per.'),
+});
+
+/** The same piece with other hardware, for the customer to choose. */
+const patternOption = z.strictObject({
+  name: line(60, 'Name the option, such as With a brass ring.'),
+  swaps: z
+    .array(
+      z.strictObject({
+        /** What is left out; nothing where something is added. */
+        hardwareId: id.nullable(),
+        /** What comes in its place; nothing where it is only left out. */
+        byHardwareId: id.nullable(),
+        perPiece,
+      }),
+    )
+    .min(1, 'Say what is different.')
+    .max(10, 'Keep it to 10 changes.'),
+});
+
+/** Good pieces out of those cut, in the shop's own runs. */
+const history = z
+  .strictObject({ good: positiveCount, total: positiveCount })
+  .refine(({ good, total }) => good <= total, 'No more can be good than were cut.');
 
 /** What a pattern is: its outline or hand count, leather, hardware and work. Each change is a new version. */
 export const patternDefinition = z
@@ -15,7 +64,10 @@ export const patternDefinition = z
     ...layoutFields,
     leatherId: z.int('Choose a leather.').positive('Choose a leather.'),
     hardware: z.array(hardwareLine).max(40, 'Keep it to 40 lines of hardware.'),
+    supplies: z.array(supplyLine).max(20, 'Keep it to 20 lines of supplies.').optional(),
+    options: z.array(patternOption).max(6, 'Keep it to 6 options.').optional(),
     work: workPlan,
+    history: history.nullable().optional(),
     needsDie: z.boolean(),
     needsPlate: z.boolean(),
   })

@@ -1,4 +1,4 @@
-import type { RunInput, RunNumbers } from '@hidewright/domain';
+import type { RunHardware, RunInput, RunNumbers } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { domainRecord } from './domain-record.ts';
@@ -16,7 +16,7 @@ import {
   version,
 } from './fields.ts';
 import { layout } from './layouts.ts';
-import { quoteBody } from './quote-body.ts';
+import { quoteBody, quoteTerms } from './quote-body.ts';
 
 export const quoteStates = ['draft', 'sent', 'agreed', 'declined', 'superseded', 'lapsed'] as const;
 export const quoteState = z.enum(quoteStates);
@@ -89,6 +89,9 @@ export const quote = z
       leatherPricePerFt2: confidential(z.string()),
     }),
     message: confidential(z.string()),
+    /** Empty in quotes of before there were any. */
+    terms: confidential(quoteTerms),
+    agreedOption: z.string().nullable(),
     /** The snapshot it is priced from, whole. */
     input: confidential(domainRecord<RunInput>('RunInput')),
     numbers: confidential(domainRecord<RunNumbers>('RunNumbers')),
@@ -149,6 +152,10 @@ export const runBasis = z
     outlinePath: z.string().nullable(),
     needsDie: z.boolean(),
     needsPlate: z.boolean(),
+    /** The pattern's options, each with its whole hardware. */
+    options: z.array(
+      z.object({ name: z.string(), hardware: domainRecord<RunHardware[]>('RunHardware') }),
+    ),
     /** Complete but for what is typed on the quote: its breaks are an example, its tooling is empty. */
     input: domainRecord<RunInput>('RunInput'),
   })
@@ -234,7 +241,11 @@ export const agreeQuote = endpoint({
   summary: 'Note that the customer agreed, by phone, mail or at the counter',
   access: ['owner'],
   params: idParams,
-  body: z.strictObject({ quantity: runQuantity, how: agreedByWord }),
+  body: z.strictObject({
+    quantity: runQuantity,
+    option: optionalLine(60).nullable().default(null),
+    how: agreedByWord,
+  }),
   reply: quote,
 });
 

@@ -9,8 +9,10 @@ import {
   optionalLine,
   paragraph,
   percent,
+  unitPrice,
   version,
 } from './fields.ts';
+import { priceRule } from './price-rule.ts';
 
 const hoursPerDay = z
   .string()
@@ -48,6 +50,16 @@ const settings = {
   trimMm: lengthMm,
   depositPercent: percent,
   quoteValidDays: count.min(1, 'Enter 1 day or more.').max(730, 'Enter at most 730 days.'),
+  /** Least that may be paid for an hour here; 0 where nobody said. */
+  minimumWagePerHour: money,
+  restPercent: percent,
+  overheadPerHour: money,
+  packingPerPiece: unitPrice,
+  cardFeePercent: percent.refine((text) => Number(text) <= 50, 'Enter at most 50 %.'),
+  cardFeeEach: money,
+  setUpCharge: money,
+  minimumOrder: money,
+  priceRule,
   paymentTermDays: count.max(365, 'Enter at most 365 days.'),
   address: paragraph(400),
   taxNumber: optionalLine(40),
@@ -72,6 +84,15 @@ export const workshop = z
     trimMm: z.string(),
     depositPercent: confidential(z.string()),
     quoteValidDays: z.int(),
+    minimumWagePerHour: confidential(z.string()),
+    restPercent: z.string(),
+    overheadPerHour: confidential(z.string()),
+    packingPerPiece: confidential(z.string()),
+    cardFeePercent: confidential(z.string()),
+    cardFeeEach: confidential(z.string()),
+    setUpCharge: confidential(z.string()),
+    minimumOrder: confidential(z.string()),
+    priceRule: confidential(priceRule),
     paymentTermDays: z.int(),
     address: z.string(),
     taxNumber: confidential(z.string()),

@@ -20,6 +20,8 @@ interface Asked {
   quoteId: number;
   /** What was agreed, or else the least that is offered. */
   quantity: number | undefined;
+  /** What was agreed, or else the piece as it is. */
+  option?: string | undefined;
   /** The day in hands, or else two working weeks from today. */
   by: string | undefined;
 }
@@ -34,7 +36,8 @@ export async function checkQuotedRun(work: Work, asked: Asked): Promise<RunCheck
   const by = asked.by ?? usualDay(work, quote);
   requireReachable(work, by, 'by');
   const quantity = asked.quantity ?? (await usualQuantity(work.em, quote));
-  return checkPlan(work, await planRun(work.em, quote, quantity), {
+  const option = asked.option ?? quote.agreedOption;
+  return checkPlan(work, await planRun(work.em, quote, quantity, option), {
     by,
     customerId: quote.customerId,
   });

@@ -96,21 +96,28 @@ async function writeLines(
     ...tax,
     invoiceId: invoice.id,
     position: 1,
-    description: order.title,
+    description: order.optionName === null ? order.title : `${order.title}, ${order.optionName}`,
     quantity: order.quantity,
     unitPrice: order.priceEach,
     amount: new Decimal(goods),
   });
-  if (order.toolingCharge.greaterThan(0)) {
+  const once = [
+    ...order.charges.map(({ name, amount }) => ({
+      description: name,
+      amount: new Decimal(amount),
+    })),
+    { description: 'Tooling, charged once', amount: order.toolingCharge },
+  ].filter(({ amount }) => amount.greaterThan(0));
+  once.forEach(({ description, amount }, at) =>
     work.em.create(InvoiceLine, {
       ...tax,
       invoiceId: invoice.id,
-      position: 2,
-      description: 'Tooling, charged once',
+      position: at + 2,
+      description,
       quantity: 1,
-      unitPrice: order.toolingCharge,
-      amount: order.toolingCharge,
-    });
-  }
+      unitPrice: amount,
+      amount,
+    }),
+  );
   await work.em.flush();
 }

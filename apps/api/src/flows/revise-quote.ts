@@ -27,6 +27,7 @@ export async function reviseQuote(work: Work, quoteId: number): Promise<Quote> {
     numbers: quote.numbers,
     overrides: quote.overrides,
     message: quote.message,
+    terms: quote.terms,
     createdAt: work.now.toISOString(),
   });
   await work.em.flush();

@@ -1,16 +1,9 @@
-import {
-  benchMinutes,
-  priceRun,
-  ticketSteps,
-  toAtMost,
-  type RunInput,
-  type RunNumbers,
-  type WorkPlan,
-} from '@hidewright/domain';
+import { benchMinutes, priceRun, ticketSteps, toAtMost, type RunInput } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 import { definitionOf } from '../modules/patterns/pattern-versions.ts';
+import { numbersOfQuote } from '../modules/quotes/quote-numbers.ts';
 import type { Quote } from '../modules/quotes/quote.entity.ts';
 
 /** A step as the job will have it. */
@@ -44,14 +37,19 @@ export interface RunPlan {
  * Works a quote's run out again for one quantity, from the snapshot that the quote kept.
  * @throws {InvalidInput | NotWorkable} when the quantity cannot be made
  */
-export async function planRun(em: EntityManager, quote: Quote, quantity: number): Promise<RunPlan> {
+export async function planRun(
+  em: EntityManager,
+  quote: Quote,
+  quantity: number,
+  option: string | null,
+): Promise<RunPlan> {
   const version = await em.findOneOrFail(PatternVersion, quote.patternVersionId);
   const { leatherId, hardware, needsDie, needsPlate } = definitionOf(version);
-  const input = forOne(quote, quantity);
+  const input = forOne(quote, quantity, option);
   const [run] = priceRun(input).breaks;
   if (run === undefined) throw new TypeError('One quantity has one rung');
   const { cutCount, containers, leatherAreaMm2 } = run;
-  const steps = planSteps(input.work, { pieces: cutCount, containers });
+  const steps = planSteps(input, { pieces: cutCount, containers });
   return {
     ...{
       quantity,
@@ -65,24 +63,36 @@ export async function planRun(em: EntityManager, quote: Quote, quantity: number)
       input,
     },
     patternId: version.patternId,
-    hardware: hardware.map(({ hardwareId, perPiece }) => ({
-      hardwareId,
-      quantity: perPiece * quantity,
+    hardware: input.hardware.map((line, at) => ({
+      // Quotes of before there were options have the pattern's hardware, line by line.
+      hardwareId: line.hardwareId ?? (hardware[at]?.hardwareId as number),
+      quantity: run.hardwareCounts[at] ?? 0,
     })),
     plannedMinutes: steps.reduce((sum, step) => sum.plus(step.plannedMinutes), new Decimal(0)),
   };
 }
 
 /** At the price that was offered: alone, a rung could be suggested another than beside smaller and larger ones. */
-function forOne(quote: Quote, quantity: number): RunInput {
-  const { breaks } = quote.numbers as RunNumbers;
+function forOne(quote: Quote, quantity: number, optionName: string | null): RunInput {
+  const numbers = numbersOfQuote(quote);
+  const input = quote.input as RunInput;
+  const option = input.options?.find(({ name }) => name === optionName);
+  const breaks = numbers.options.find(({ name }) => name === optionName)?.breaks ?? numbers.breaks;
   const typedPrice = breaks.find((each) => each.quantity === quantity)?.priceEach ?? null;
-  return { ...(quote.input as RunInput), breaks: [{ quantity, typedPrice }] };
+  return {
+    ...input,
+    hardware: option?.hardware ?? input.hardware,
+    options: [],
+    breaks: [{ quantity, typedPrice }],
+  };
 }
 
 /** Each step with its minutes, to the hundredth of a minute that a job keeps. */
-function planSteps(plan: WorkPlan, run: { pieces: number; containers: number }): PlannedStep[] {
-  const { bySteps } = benchMinutes(plan, run);
+function planSteps(
+  { work: plan, restPercent }: RunInput,
+  run: { pieces: number; containers: number },
+): PlannedStep[] {
+  const { bySteps } = benchMinutes(plan, { ...run, restPercent });
   return ticketSteps(plan).map((step, at) => ({
     name: step.name,
     per: step.per,

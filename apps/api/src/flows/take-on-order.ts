@@ -38,7 +38,7 @@ export async function takeOnOrder(work: Work, asked: TakingOn): Promise<Order> {
   await refuseTwice(work.em, quote);
   requirePossible(quote, 'take on');
   requireReachable(work, asked.promisedOn, 'promisedOn');
-  const plan = await planRun(work.em, quote, agreedQuantity(quote));
+  const plan = await planRun(work.em, quote, agreedQuantity(quote), quote.agreedOption);
   const check = await checkPlan(work, plan, { by: asked.promisedOn, customerId: quote.customerId });
   if (!asked.evenIfShort) refuseShort(check, asked.awaits);
   const estimate = toEstimate(plan);
@@ -98,6 +98,8 @@ async function makeOrder(
     priceEach: new Decimal(numbers.priceEach),
     goodsTotal: new Decimal(numbers.goodsTotal),
     toolingCharge: new Decimal(numbers.toolingCharge),
+    optionName: quote.agreedOption,
+    charges: numbers.charges.map(({ name, amount }) => ({ name, amount })),
     total: new Decimal(numbers.total),
     state: stateAwaiting(awaits),
     awaits,

@@ -13,7 +13,14 @@ import { runInputFor } from './run-input.ts';
 /** All of a draft that follows from what was typed. */
 type WorkedOut = Pick<
   Quote,
-  'customerId' | 'patternVersionId' | 'layoutId' | 'title' | 'inHandsOn' | 'overrides' | 'message'
+  | 'customerId'
+  | 'patternVersionId'
+  | 'layoutId'
+  | 'title'
+  | 'inHandsOn'
+  | 'overrides'
+  | 'message'
+  | 'terms'
 > & { input: RunInput; numbers: RunNumbers };
 
 /**
@@ -38,6 +45,7 @@ export async function workOutQuote(
     inHandsOn: asked.inHandsOn,
     overrides: setByHand(asked.overrides),
     message: asked.message,
+    terms: asked.terms,
     input,
     numbers: priceRun(input),
   };

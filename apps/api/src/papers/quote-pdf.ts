@@ -9,10 +9,11 @@ import {
   ticketHead,
   type Paper,
 } from './paper.ts';
-import { printedDay, printedNumber } from './paper-text.ts';
+import { printedDay } from './paper-text.ts';
+import { drawPrices, type QuotePrices } from './quote-prices.ts';
 
 /** A quote as the customer gets it: nothing of what it costs the shop is in here. */
-export interface QuotePaper {
+export interface QuotePaper extends QuotePrices {
   number: string;
   shopName: string;
   shopAddress: string;
@@ -25,9 +26,6 @@ export interface QuotePaper {
   message: string;
   currency: string;
   outlinePath: string | null;
-  breaks: { quantity: number; priceEach: string; goodsTotal: string; total: string }[];
-  tooling: { name: string; charge: string }[];
-  toolingTotal: string;
 }
 
 /** Draws a quote; the same quote always gives the same bytes. */
@@ -85,65 +83,6 @@ function halfSize(path: string): { halfWidth: number; halfHeight: number } {
   const reach = (at: 1 | 2) => Math.max(1, ...ends.map((end) => Math.abs(Number(end[at]))));
   const ellipse = radii.length === 2 && ends.every((end) => Number(end[2]) === 0);
   return { halfWidth: reach(1), halfHeight: ellipse ? Number(radii[0]?.[2]) : reach(2) };
-}
-
-const columns = [
-  { title: 'pieces', x: sheet.left, width: 90 },
-  { title: 'each', x: sheet.left + 100, width: 90 },
-  { title: 'pieces alone', x: sheet.left + 210, width: 110 },
-  { title: 'with tooling', x: sheet.left + 340, width: 143 },
-] as const;
-
-function drawPrices(paper: Paper, quote: QuotePaper, top: number): number {
-  const tooled = Number(quote.toolingTotal) > 0;
-  const shown = columns.slice(0, tooled ? 4 : 3);
-  drawRow(
-    paper,
-    top,
-    shown.map((column) => (tooled || column.title !== 'pieces alone' ? column.title : 'total')),
-    inkSoft,
-  );
-  let y = top + 18;
-  for (const rung of quote.breaks) {
-    const money = [rung.priceEach, rung.goodsTotal, rung.total].map((amount) =>
-      printedNumber(amount, 2),
-    );
-    const cells = [printedNumber(String(rung.quantity), 0), ...money];
-    drawRow(paper, y, cells.slice(0, shown.length), ink);
-    y += 18;
-  }
-  stitchAcross(paper, y + 4);
-  y += 14;
-  for (const tool of quote.tooling) {
-    paper
-      .font('plain')
-      .fontSize(10)
-      .fillColor(ink)
-      .text(`${tool.name}, charged once`, sheet.left, y, {
-        width: 320,
-        height: 14,
-        ellipsis: true,
-      });
-    paper.text(printedNumber(tool.charge, 2), sheet.left + 340, y, {
-      width: 143,
-      align: 'right',
-      lineBreak: false,
-    });
-    y += 16;
-  }
-  return y + 10;
-}
-
-function drawRow(paper: Paper, y: number, cells: string[], colour: string): void {
-  cells.forEach((cell, at) => {
-    const column = columns[at];
-    if (column === undefined) return;
-    paper
-      .font(at === 0 && colour === ink ? 'strong' : 'plain')
-      .fontSize(10)
-      .fillColor(colour);
-    paper.text(cell, column.x, y, { width: column.width, align: 'right', lineBreak: false });
-  });
 }
 
 function drawWords(paper: Paper, quote: QuotePaper, top: number): void {

@@ -29,16 +29,11 @@ export interface RunCost extends CutPlan {
  * cut; desk time at the same wage; packing, carriage and tooling once. Each line is rounded once and
  * they add up. What a card costs depends on the price and is added there. The input has been checked.
  */
-export function costRun(input: RunInput, quantity: number): RunCost {
-  const rate = goodShare(input.work);
-  const cut = planCut({
-    good: quantity,
-    rate,
-    history: input.history,
-    confidence: new Exact(input.confidencePercent).div(100).toNumber(),
-    perContainer: input.layout.pieces,
-    perRow: input.layout.rowPieces,
-  });
+export function costRun(
+  input: RunInput,
+  quantity: number,
+  cut: CutPlan = cutOf(input, quantity),
+): RunCost {
   const area = new Exact(input.layout.containerAreaMm2).times(cut.containers);
   const bench = benchMinutes(input.work, {
     pieces: cut.cutCount,
@@ -72,6 +67,18 @@ export function costRun(input: RunInput, quantity: number): RunCost {
     minutesByStep: bench.bySteps,
     allMinutes: toAtMost(new Exact(bench.total).plus(input.deskMinutesPerOrder), 4),
   };
+}
+
+/** How many to cut for so many good ones. It is the same for every option of a run. */
+function cutOf(input: RunInput, quantity: number): CutPlan {
+  return planCut({
+    good: quantity,
+    rate: goodShare(input.work),
+    history: input.history,
+    confidence: new Exact(input.confidencePercent).div(100).toNumber(),
+    perContainer: input.layout.pieces,
+    perRow: input.layout.rowPieces,
+  });
 }
 
 function addPackingAndCarriage(lines: CostLines, input: RunInput, quantity: number): void {

@@ -37,6 +37,8 @@ export interface RunLeather {
 }
 
 export interface RunHardware {
+  /** the shop's own number of it, passed through */
+  hardwareId?: number | undefined;
   name: string;
   /** up to 4 places */
   unitPrice: DecimalText;

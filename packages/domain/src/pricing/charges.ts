@@ -27,31 +27,44 @@ export interface Billed {
 export function bill(input: RunInput, quantity: number, priceEach: DecimalText): Billed {
   const digits = input.minorDigits;
   const goodsTotal = lineAmount(quantity, priceEach, digits);
-  const charges = chargesOn(input, new Exact(goodsTotal));
-  const tooling = toolingCharge(input);
-  const total = charges.reduce((sum, { amount }) => sum.plus(amount), new Exact(goodsTotal));
   return {
     goodsTotal,
-    toolingCharge: tooling,
-    charges,
-    total: toPlaces(total.plus(tooling), digits),
+    toolingCharge: toolingCharge(input),
+    charges: chargesOn(input, new Exact(goodsTotal))
+      .filter(([, , amount]) => !amount.isZero())
+      .map(([kind, name, amount]) => ({ kind, name, amount: toPlaces(amount, digits) })),
+    total: toPlaces(totalAt(input, quantity, new Exact(priceEach)), digits),
   };
 }
 
-function chargesOn(input: RunInput, goods: Decimal): Charge[] {
+/** What an order comes to, without its lines: for a search that asks many prices. */
+export function totalAt(input: RunInput, quantity: number, priceEach: Decimal): Decimal {
+  const goods = priceEach.times(quantity).toDecimalPlaces(input.minorDigits);
+  return chargesOn(input, goods).reduce(
+    (sum, [, , amount]) => sum.plus(amount),
+    goods.plus(toolingCharge(input)),
+  );
+}
+
+/** What the card company keeps of a total, not yet rounded. */
+export function cardFeeOn({ cardFee }: RunInput, total: Decimal): Decimal {
+  return cardFee ? total.times(cardFee.percent).div(100).plus(cardFee.each) : new Exact(0);
+}
+
+function chargesOn(input: RunInput, goods: Decimal): [ChargeKind, string, Decimal][] {
   const digits = input.minorDigits;
   const setUp = new Exact(input.setUpCharge ?? '0');
-  const rush = new Exact(toPlaces(goods.times(input.rushPercent ?? '0').div(100), digits));
+  const rush = goods
+    .times(input.rushPercent ?? '0')
+    .div(100)
+    .toDecimalPlaces(digits);
   const missing = new Exact(input.minimumOrder ?? '0').minus(goods).minus(setUp).minus(rush);
-  const all: [ChargeKind, string, Decimal][] = [
+  return [
     ['set-up', 'Setting up', setUp],
     ['rush', 'Rush', rush],
     ['minimum', 'Up to the minimum order', Exact.max(0, missing)],
     ['carriage', 'Carriage', new Exact(input.carriage?.charge ?? '0')],
   ];
-  return all
-    .filter(([, , amount]) => !amount.isZero())
-    .map(([kind, name, amount]) => ({ kind, name, amount: toPlaces(amount, digits) }));
 }
 
 /** What the customer pays for tooling, once. */

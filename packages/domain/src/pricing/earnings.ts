@@ -3,7 +3,7 @@ import { type CostLine, CostLines, hourlyKinds, isNot, sumOf } from '../costing/
 import type { RunCost } from '../costing/cost-run.ts';
 import type { RunInput } from '../costing/run-input.ts';
 import { type DecimalText, Exact, toPlaces } from '../numbers/decimal-text.ts';
-import { type Billed, bill } from './charges.ts';
+import { type Billed, bill, cardFeeOn } from './charges.ts';
 
 export interface Earnings extends Billed {
   costLines: CostLine[];
@@ -40,13 +40,12 @@ export function earn(input: RunInput, cost: RunCost, priceEach: DecimalText): Ea
   };
 }
 
-function cardFee({ cardFee, minorDigits }: RunInput, quantity: number, total: DecimalText) {
-  if (!cardFee) return [];
-  const lines = new CostLines(minorDigits, quantity);
-  const fee = new Exact(total).times(cardFee.percent).div(100).plus(cardFee.each);
-  if (!fee.isZero()) {
-    lines.add('fees', 'Card fees', fee, `${cardFee.percent} % of ${total} and ${cardFee.each}`);
-  }
+function cardFee(input: RunInput, quantity: number, total: DecimalText): CostLine[] {
+  const fee = cardFeeOn(input, new Exact(total));
+  if (!input.cardFee || fee.isZero()) return [];
+  const lines = new CostLines(input.minorDigits, quantity);
+  const { percent, each } = input.cardFee;
+  lines.add('fees', 'Card fees', fee, `${percent} % of ${total} and ${each} for the payment`);
   return lines.lines;
 }
 

@@ -13,9 +13,9 @@ const mostSteps = 10_000_000;
 export function leastPrice(
   step: DecimalText,
   guess: Decimal,
-  reaches: (price: DecimalText) => boolean,
+  reaches: (price: Decimal) => boolean,
 ): DecimalText {
-  const priceOf = (steps: number) => toText(new Exact(step).times(steps));
+  const priceOf = (steps: number) => new Exact(step).times(steps);
   const enough = (steps: number) => reaches(priceOf(steps));
   const start = Math.min(mostSteps, Math.max(1, guess.div(step).ceil().toNumber()));
   let [low, high] = enough(start) ? below(start, enough) : above(start, enough);
@@ -24,7 +24,7 @@ export function leastPrice(
     if (enough(middle)) high = middle;
     else low = middle;
   }
-  return priceOf(high);
+  return toText(priceOf(high));
 }
 
 /** The last that is not enough (or 0) and one that is, walking down from one that is. */

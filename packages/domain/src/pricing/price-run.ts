@@ -16,22 +16,29 @@ import { breakWarnings, cheaperFrom, ladderWarnings } from './warnings.ts';
  */
 export function priceRun(input: RunInput): RunNumbers {
   checkRunInput(input);
-  const breaks = ladderOf(input, costsOf(input));
+  const costs = costsOf(input);
+  const breaks = ladderOf(input, costs);
   const options = (input.options ?? []).map((option, at) => ({
     name: option.name,
-    breaks: optionLadder(input, option, at, breaks),
+    breaks: optionLadder(
+      { ...input, hardware: option.hardware, options: [] },
+      option,
+      at,
+      breaks,
+      costs,
+    ),
   }));
   return { breaks, options, warnings: ladderWarnings(input, breaks, options) };
 }
 
 function optionLadder(
-  input: RunInput,
+  run: RunInput,
   option: RunOption,
   at: number,
   breaks: readonly BreakNumbers[],
+  cuts: readonly RunCost[],
 ): BreakNumbers[] {
-  const run = { ...input, hardware: option.hardware, options: [] };
-  const costs = costsOf(run);
+  const costs = cuts.map((cut) => costRun(run, cut.quantity, cut));
   const suggested = option.typedExtra === null ? suggestedPrices(run, costs) : null;
   return ladderOf({ ...run, breaks: optionBreaks(option, at, breaks, suggested) }, costs);
 }

@@ -1,11 +1,11 @@
 import type { Decimal } from 'decimal.js';
-import { sumOf } from '../costing/cost-lines.ts';
+import { isNot, sumOf } from '../costing/cost-lines.ts';
 import type { RunCost } from '../costing/cost-run.ts';
 import type { PriceRule, RunInput } from '../costing/run-input.ts';
 import { type DecimalText, Exact } from '../numbers/decimal-text.ts';
-import { earn } from './earnings.ts';
+import { cardFeeOn, totalAt } from './charges.ts';
 import { leastPrice } from './least-price.ts';
-import { targetPrice, withoutExtras, withoutTooling } from './target-price.ts';
+import { targetPrice, withoutExtras } from './target-price.ts';
 
 /**
  * The smallest price step that keeps a rule, tooling aside. A margin is a share of the price, a markup
@@ -14,14 +14,13 @@ import { targetPrice, withoutExtras, withoutTooling } from './target-price.ts';
  */
 export function rulePrice(input: RunInput, cost: RunCost, rule: PriceRule): DecimalText {
   if (rule.kind === 'target') return targetPrice(input, cost, false);
-  const [asked, order] = [withoutExtras(input), withoutTooling(cost)];
-  const costs = sumOf(order.costLines, () => true);
+  const asked = withoutExtras(input);
+  const costs = sumOf(cost.costLines, isNot('tooling'));
   return leastPrice(input.priceStep, wantedFor(rule, costs, cost.quantity), (price) => {
-    const earned = earn(asked, order, price);
-    const allCosts = sumOf(earned.costLines, () => true);
-    return new Exact(earned.total).gte(
-      wantedFor(rule, allCosts, cost.quantity).times(cost.quantity),
-    );
+    const total = totalAt(asked, cost.quantity, price);
+    const fee = cardFeeOn(asked, total).toDecimalPlaces(input.minorDigits);
+    const wanted = wantedFor(rule, costs.plus(fee), cost.quantity);
+    return total.gte(wanted.times(cost.quantity));
   });
 }
 

@@ -3,8 +3,7 @@ import { hourlyKinds, isNot, sumOf } from '../costing/cost-lines.ts';
 import type { RunCost } from '../costing/cost-run.ts';
 import type { RunInput } from '../costing/run-input.ts';
 import { type DecimalText, Exact, toText } from '../numbers/decimal-text.ts';
-import { toolingCharge } from './charges.ts';
-import { earn } from './earnings.ts';
+import { cardFeeOn, totalAt } from './charges.ts';
 import { leastPrice } from './least-price.ts';
 
 /**
@@ -14,16 +13,24 @@ import { leastPrice } from './least-price.ts';
  */
 export function targetPrice(input: RunInput, cost: RunCost, tooling: boolean): DecimalText {
   const asked = tooling ? input : withoutExtras(input);
-  const order = tooling ? cost : withoutTooling(cost);
-  const wanted = new Exact(input.targetPerHour).times(cost.benchMinutes).div(60);
-  const bought = sumOf(order.costLines, isNot(...hourlyKinds));
-  const charged = new Exact(toolingCharge(asked))
-    .plus(asked.setUpCharge ?? '0')
-    .plus(asked.carriage?.charge ?? '0');
-  const guess = wanted.plus(bought).minus(charged).div(cost.quantity);
-  return leastPrice(input.priceStep, guess, (price) =>
-    new Exact(earn(asked, order, price).perBenchHour).gte(input.targetPerHour),
+  const bought = sumOf(
+    cost.costLines,
+    isNot(...hourlyKinds, ...(tooling ? [] : ['tooling' as const])),
   );
+  const wanted = new Exact(input.targetPerHour).times(cost.benchMinutes).div(60);
+  return leastPrice(input.priceStep, guess(asked, wanted.plus(bought), cost.quantity), (price) => {
+    const total = totalAt(asked, cost.quantity, price);
+    const fee = cardFeeOn(asked, total).toDecimalPlaces(input.minorDigits);
+    const hourly = total.minus(bought).minus(fee).times(60).div(cost.benchMinutes);
+    return hourly.toDecimalPlaces(input.minorDigits).gte(input.targetPerHour);
+  });
+}
+
+/** The price each that brings so much after card fees, charges deducted; right but for rounding. */
+function guess(input: RunInput, wanted: Decimal, quantity: number): Decimal {
+  const { percent = '0', each = '0' } = input.cardFee ?? {};
+  const total = wanted.plus(each).div(new Exact(100).minus(percent)).times(100);
+  return total.minus(totalAt({ ...input, minimumOrder: '0' }, 0, new Exact(0))).div(quantity);
 }
 
 /** The same run without what is charged once for its tools, its hurry, or its smallness. */
@@ -32,11 +39,6 @@ export const withoutExtras = (input: RunInput): RunInput => ({
   tooling: [],
   rushPercent: '0',
   minimumOrder: '0',
-});
-
-export const withoutTooling = (cost: RunCost): RunCost => ({
-  ...cost,
-  costLines: cost.costLines.filter(({ kind }) => kind !== 'tooling'),
 });
 
 /** Raises each price to the one of the next larger quantity, so that a ladder never rises. */

@@ -1,11 +1,12 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
-import type { Decimal } from 'decimal.js';
-import { OunceType, UnitPriceType } from '../../db/columns/columns.ts';
+import type { Leather as LeatherReply } from '@hidewright/contract';
+import { Decimal } from 'decimal.js';
+import { AreaType, OunceType, PercentType, UnitPriceType } from '../../db/columns/columns.ts';
 
 /** What a supplier sells: tannage, colour, finish, weight. */
 @Entity({ tableName: 'leather' })
 export class Leather {
-  [OptionalProps]?: 'tannage' | 'colour' | 'finish' | 'active' | 'version';
+  [OptionalProps]?: 'tannage' | 'colour' | 'finish' | 'wholeUsablePercent' | 'active' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -33,6 +34,16 @@ export class Leather {
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   supplierId: number | null = null;
+
+  /** What it is bought as, whole: null where nobody said. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  wholeForm: LeatherReply['wholeForm'] = null;
+
+  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  wholeAreaMm2: Decimal | null = null;
+
+  @Property({ type: PercentType, columnType: 'integer' })
+  wholeUsablePercent: Decimal = new Decimal(85);
 
   @Property({ type: 'boolean', columnType: 'integer' })
   active = true;

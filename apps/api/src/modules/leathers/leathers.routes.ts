@@ -51,6 +51,8 @@ export function leatherRoutes(context: Context): Router {
       ...body,
       pricePerFt2: new Decimal(body.pricePerFt2),
       ...weights(body),
+      wholeAreaMm2: decimalOrNull(body.wholeAreaMm2),
+      wholeUsablePercent: new Decimal(body.wholeUsablePercent),
     });
     await work.em.flush();
     await logDeed(work, {
@@ -70,9 +72,13 @@ export function leatherRoutes(context: Context): Router {
     );
     if (body.name !== undefined) await requireFreeName(work.em, Leather, body.name, leather.id);
     await requireSupplier(work, body.supplierId);
-    const { pricePerFt2, weightLowOz, weightHighOz, ...plain } = body;
+    const { pricePerFt2, weightLowOz, weightHighOz, wholeAreaMm2, wholeUsablePercent, ...plain } =
+      body;
     assignDefined(leather, plain);
     if (pricePerFt2 !== undefined) leather.pricePerFt2 = new Decimal(pricePerFt2);
+    if (wholeAreaMm2 !== undefined) leather.wholeAreaMm2 = decimalOrNull(wholeAreaMm2);
+    if (wholeUsablePercent !== undefined)
+      leather.wholeUsablePercent = new Decimal(wholeUsablePercent);
     if (weightLowOz !== undefined) leather.weightLowOz = decimalOrNull(weightLowOz);
     if (weightHighOz !== undefined) leather.weightHighOz = decimalOrNull(weightHighOz);
     requireWeights(
@@ -138,6 +144,9 @@ function toReply(leather: Leather, stock: LeatherStock): LeatherReply {
     weightHighOz: leather.weightHighOz?.toString() ?? null,
     pricePerFt2: priceText(leather.pricePerFt2),
     supplierId: leather.supplierId,
+    wholeForm: leather.wholeForm,
+    wholeAreaMm2: leather.wholeAreaMm2?.toString() ?? null,
+    wholeUsablePercent: leather.wholeUsablePercent.toString(),
     supplierName: stock.supplierNames.get(leather.supplierId ?? 0) ?? null,
     active: leather.active,
     ...stock.areasOf(leather.id),

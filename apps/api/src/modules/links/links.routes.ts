@@ -21,7 +21,7 @@ export function linkRoutes(context: Context): Router {
       ...work,
       actor: { id: null, name: 'The customer', role: 'customer' as const },
     };
-    await agreeQuote(byCustomer, { quoteId, quantity: body.quantity, how: 'link' });
+    await agreeQuote(byCustomer, { quoteId, ...body, how: 'link' });
     return offerOf(work, quoteId);
   });
 

@@ -53,9 +53,11 @@ describe('a customer’s link', () => {
       agreedQuantity: null,
     });
     expect(Object.keys(body.breaks[0]).sort()).toEqual([
+      'charges',
       'goodsTotal',
       'priceEach',
       'quantity',
+      'reorderTotal',
       'total',
     ]);
     const text = JSON.stringify(body);

@@ -1,4 +1,4 @@
-import { describeOutline } from '@hidewright/domain';
+import { describeOutline, type RunInput } from '@hidewright/domain';
 import type { LayoutSource, Offer } from '@hidewright/contract';
 import { notFound, Problem } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
@@ -32,7 +32,7 @@ export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
   if (quote === null) throw notFound('quote');
   const workshop = await work.em.findOneOrFail(Workshop, 1);
   const customer = await work.em.findOneOrFail(Customer, quote.customerId);
-  const { breaks, tooling, toolingTotal } = await quotedOf(work, quote);
+  const { breaks, options, tooling, toolingTotal } = quotedOf(quote);
   return {
     shopName: workshop.name,
     number: quote.number,
@@ -44,15 +44,13 @@ export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
     message: quote.message,
     outline: outlineOf(await work.em.findOneOrFail(StoredLayout, quote.layoutId)),
     currency: workshop.currency,
-    breaks: breaks.map(({ quantity, priceEach, goodsTotal, total }) => ({
-      quantity,
-      priceEach,
-      goodsTotal,
-      total,
-    })),
+    breaks: breaks.map(({ typedPrice: _typedPrice, ...rung }) => rung),
+    options,
     tooling,
     toolingTotal,
+    resalePrice: (quote.input as RunInput).resalePrice ?? null,
     agreedQuantity: quote.agreedQuantity,
+    agreedOption: quote.agreedOption,
     agreedOn: quote.agreedAt === null ? null : dayOf(quote.agreedAt, workshop.timeZone),
   };
 }

@@ -6,7 +6,7 @@ import { JsonText } from '../../db/columns/json-text.ts';
 /** A run that the shop has taken on. */
 @Entity({ tableName: 'customer_order' })
 export class Order {
-  [OptionalProps]?: 'version';
+  [OptionalProps]?: 'charges' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -34,6 +34,14 @@ export class Order {
 
   @Property({ type: MoneyType, columnType: 'integer' })
   toolingCharge!: Decimal;
+
+  /** The option that was agreed; null for the piece as it is. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  optionName: string | null = null;
+
+  /** Charged once beside pieces and tooling. */
+  @Property({ type: JsonText, columnType: 'text' })
+  charges: { name: string; amount: string }[] = [];
 
   @Property({ type: MoneyType, columnType: 'integer' })
   total!: Decimal;

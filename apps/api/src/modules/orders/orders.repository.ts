@@ -20,6 +20,8 @@ interface OrderRow {
   price_each: number;
   goods_total: number;
   tooling_charge: number;
+  option_name: string | null;
+  charges: string;
   total: number;
   in_hands_on: string | null;
   promised_on: string;
@@ -112,6 +114,8 @@ function toReply(row: OrderRow): Order {
     priceEach: priceText(unscaled(row.price_each, 4)),
     goodsTotal: moneyText(unscaled(row.goods_total, 2)),
     toolingCharge: moneyText(unscaled(row.tooling_charge, 2)),
+    optionName: row.option_name,
+    charges: JSON.parse(row.charges) as Order['charges'],
     total: moneyText(unscaled(row.total, 2)),
     inHandsOn: row.in_hands_on,
     promisedOn: row.promised_on,

@@ -13,6 +13,10 @@ export function quoteLetter(
     paper.breaks
       .map((rung) => `  ${rung.quantity} at ${rung.priceEach} each: ${rung.goodsTotal}`)
       .join('\n'),
+    ...paper.options.map(
+      ({ name, breaks }) =>
+        `${name}:\n${breaks.map((rung) => `  ${rung.quantity} at ${rung.priceEach} each: ${rung.goodsTotal}`).join('\n')}`,
+    ),
     paper.tooling.map((tool) => `${tool.name}, charged once: ${tool.charge}`).join('\n'),
     `Prices in ${paper.currency}. Sales tax, where it applies, is added on the invoice.`,
     paper.message,

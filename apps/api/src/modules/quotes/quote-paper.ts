@@ -1,3 +1,4 @@
+import type { RunInput } from '@hidewright/domain';
 import type { QuotePaper } from '../../papers/quote-pdf.ts';
 import type { Work } from '../../work.ts';
 import { Customer } from '../customers/customer.entity.ts';
@@ -12,7 +13,7 @@ import { dayOf } from './say-day.ts';
 export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
   const workshop = await work.em.findOneOrFail(Workshop, 1);
   const customer = await work.em.findOneOrFail(Customer, quote.customerId);
-  const { breaks, tooling, toolingTotal } = await quotedOf(work, quote);
+  const { breaks, options, tooling, toolingTotal } = quotedOf(quote);
   return {
     number: quote.revision === 1 ? quote.number : `${quote.number}, revision ${quote.revision}`,
     shopName: workshop.name,
@@ -27,6 +28,8 @@ export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
     currency: workshop.currency,
     outlinePath: pathOf(await work.em.findOneOrFail(StoredLayout, quote.layoutId)),
     breaks,
+    options,
+    resalePrice: (quote.input as RunInput).resalePrice ?? null,
     tooling,
     toolingTotal,
   };

@@ -1,5 +1,5 @@
-import type { Quote as QuoteReply } from '@hidewright/contract';
-import type { Layout, RunInput, RunNumbers } from '@hidewright/domain';
+import { quoteTerms, type Quote as QuoteReply } from '@hidewright/contract';
+import type { Layout, RunInput } from '@hidewright/domain';
 import type { Work } from '../../work.ts';
 import { Customer } from '../customers/customer.entity.ts';
 import { StoredLayout } from '../layouts/layout.entity.ts';
@@ -11,6 +11,7 @@ import { Pattern } from '../patterns/pattern.entity.ts';
 import { PatternVersion } from '../patterns/pattern-version.entity.ts';
 import { whyNoMail } from './why-no-mail.ts';
 import { Quote } from './quote.entity.ts';
+import { numbersOfQuote } from './quote-numbers.ts';
 import { quotedOf } from './quoted.ts';
 
 /**
@@ -27,7 +28,7 @@ export async function quoteReply(
   const pattern = await work.em.findOneOrFail(Pattern, version.patternId);
   const stored = await work.em.findOneOrFail(StoredLayout, quote.layoutId);
   const order = await work.em.findOne(Order, { quoteId: quote.id });
-  const { breaks } = await quotedOf(work, quote);
+  const { breaks } = quotedOf(quote);
   const input = quote.input as RunInput;
   return {
     ...ownFields(quote),
@@ -42,7 +43,7 @@ export async function quoteReply(
     breaks,
     tooling: input.tooling,
     input,
-    numbers: quote.numbers as RunNumbers,
+    numbers: numbersOfQuote(quote),
     customerEmail: customer.email,
     cannotMail: whyNoMail(customer, mailAvailable),
     letter: await letterOf(work, quote.id),
@@ -67,6 +68,8 @@ function ownFields(quote: Quote) {
     agreedAt: quote.agreedAt,
     agreedQuantity: quote.agreedQuantity,
     agreedHow: quote.agreedHow as QuoteReply['agreedHow'],
+    agreedOption: quote.agreedOption,
+    terms: quoteTerms.parse(quote.terms),
     overrides: quote.overrides,
     message: quote.message,
     version: quote.version,

@@ -4,7 +4,7 @@ import { JsonText } from '../../db/columns/json-text.ts';
 /** An offer of a run at several quantities, with the snapshot it was priced from. */
 @Entity({ tableName: 'quote' })
 export class Quote {
-  [OptionalProps]?: 'revision' | 'overrides' | 'message' | 'version';
+  [OptionalProps]?: 'revision' | 'overrides' | 'message' | 'terms' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -51,6 +51,10 @@ export class Quote {
   @Property({ type: 'text', columnType: 'text' })
   message = '';
 
+  /** QuoteTerms of the contract; empty in quotes of before there were any. */
+  @Property({ type: JsonText, columnType: 'text' })
+  terms: unknown = {};
+
   @Property({ type: 'text', columnType: 'text' })
   createdAt!: string;
 
@@ -65,6 +69,10 @@ export class Quote {
 
   @Property({ type: 'text', columnType: 'text', nullable: true })
   agreedHow: string | null = null;
+
+  /** The option that was agreed; null for the piece as it is. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  agreedOption: string | null = null;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;

@@ -1,6 +1,14 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
-import type { Decimal } from 'decimal.js';
-import { LengthType, MoneyType, PercentType, TimeType } from '../../db/columns/columns.ts';
+import type { PriceRule } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import {
+  LengthType,
+  MoneyType,
+  PercentType,
+  TimeType,
+  UnitPriceType,
+} from '../../db/columns/columns.ts';
+import { JsonText } from '../../db/columns/json-text.ts';
 
 /** The shop itself and its starting values: one row, made when the database is. */
 @Entity({ tableName: 'workshop' })
@@ -13,6 +21,15 @@ export class Workshop {
     | 'deskMinutesPerOrder'
     | 'quoteValidDays'
     | 'paymentTermDays'
+    | 'minimumWagePerHour'
+    | 'restPercent'
+    | 'overheadPerHour'
+    | 'packingPerPiece'
+    | 'cardFeePercent'
+    | 'cardFeeEach'
+    | 'setUpCharge'
+    | 'minimumOrder'
+    | 'priceRule'
     | 'address'
     | 'taxNumber'
     | 'version';
@@ -78,6 +95,37 @@ export class Workshop {
 
   @Property({ type: 'integer', columnType: 'integer' })
   paymentTermDays = 30;
+
+  /** Least that may be paid for an hour; nought where nobody said. */
+  @Property({ type: MoneyType, columnType: 'integer' })
+  minimumWagePerHour: Decimal = new Decimal(0);
+
+  /** On top of all bench time, for rest. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  restPercent: Decimal = new Decimal(0);
+
+  /** Rent, light, insurance, for each bench hour. */
+  @Property({ type: MoneyType, columnType: 'integer' })
+  overheadPerHour: Decimal = new Decimal(0);
+
+  @Property({ type: UnitPriceType, columnType: 'integer' })
+  packingPerPiece: Decimal = new Decimal(0);
+
+  @Property({ type: PercentType, columnType: 'integer' })
+  cardFeePercent: Decimal = new Decimal(0);
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  cardFeeEach: Decimal = new Decimal(0);
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  setUpCharge: Decimal = new Decimal(0);
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  minimumOrder: Decimal = new Decimal(0);
+
+  /** How a price that nobody typed is worked out. */
+  @Property({ type: JsonText, columnType: 'text' })
+  priceRule: PriceRule = { kind: 'target' };
 
   @Property({ type: 'text', columnType: 'text' })
   address = '';

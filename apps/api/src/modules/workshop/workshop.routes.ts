@@ -10,7 +10,7 @@ import { currencies } from '@hidewright/domain';
 import type { Context } from '../../context.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { requireVersion } from '../../http/conditions.ts';
-import { moneyText } from '../../http/decimal-text.ts';
+import { moneyText, priceText } from '../../http/decimal-text.ts';
 import { invalid } from '../../http/problem.ts';
 import { serve } from '../../http/serve.ts';
 import { logDeed } from '../activity/activity-log.ts';
@@ -53,6 +53,14 @@ const decimalFields = [
   'spacingMm',
   'trimMm',
   'depositPercent',
+  'minimumWagePerHour',
+  'restPercent',
+  'overheadPerHour',
+  'packingPerPiece',
+  'cardFeePercent',
+  'cardFeeEach',
+  'setUpCharge',
+  'minimumOrder',
 ] as const;
 type DecimalField = (typeof decimalFields)[number];
 
@@ -92,6 +100,15 @@ function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {
     trimMm: workshop.trimMm.toString(),
     depositPercent: workshop.depositPercent.toString(),
     quoteValidDays: workshop.quoteValidDays,
+    minimumWagePerHour: moneyText(workshop.minimumWagePerHour),
+    restPercent: workshop.restPercent.toString(),
+    overheadPerHour: moneyText(workshop.overheadPerHour),
+    packingPerPiece: priceText(workshop.packingPerPiece),
+    cardFeePercent: workshop.cardFeePercent.toString(),
+    cardFeeEach: moneyText(workshop.cardFeeEach),
+    setUpCharge: moneyText(workshop.setUpCharge),
+    minimumOrder: moneyText(workshop.minimumOrder),
+    priceRule: workshop.priceRule,
     paymentTermDays: workshop.paymentTermDays,
     address: workshop.address,
     taxNumber: workshop.taxNumber,

@@ -1,3 +1,4 @@
+import { quoteTerms } from '@hidewright/contract';
 import { addDays, addWorkdays } from '@hidewright/domain';
 import { agreeQuote } from '../../flows/agree-quote.ts';
 import { createQuote } from '../../flows/create-quote.ts';
@@ -41,7 +42,12 @@ function planOffer(stage: Stage, played: Played): void {
   }
   if (!reaches(run, 'agreed')) return;
   year.planAfter(run.daysBefore, 2, '16:20', async () => {
-    const agreement = { quoteId: played.quoteId, quantity: run.chosen, how: run.by ?? 'link' };
+    const agreement = {
+      quoteId: played.quoteId,
+      quantity: run.chosen,
+      option: null,
+      how: run.by ?? 'link',
+    };
     if (agreement.how === 'link') await shop.byCustomer((work) => agreeQuote(work, agreement));
     else await shop.as('owner', (work) => agreeQuote(work, agreement));
   });
@@ -67,12 +73,14 @@ async function quote({ shop, year, furnished }: Stage, played: Played): Promise<
         breaks: run.quantities.map((quantity) => ({
           quantity,
           typedPrice: quantity === run.chosen && run.typed !== undefined ? run.typed : null,
+          rule: null,
         })),
         tooling:
           needsPlate && reorder === null
             ? [{ name: 'Stamp plate, magnesium', cost: '46.00', charge: '55.00' }]
             : [],
         message: '',
+        terms: quoteTerms.parse({}),
         overrides: {},
       },
       laid,
