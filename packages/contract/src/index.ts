@@ -34,3 +34,4 @@ export * from './today.ts';
 export * from './tools.ts';
 export * from './work-plan.ts';
 export * from './workshop.ts';
+export * from './run-as-asked.ts';
