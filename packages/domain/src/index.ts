@@ -71,6 +71,7 @@ export { chanceOfEnough } from './rejects/chance.ts';
 
 export * from './work/work-plan.ts';
 export * from './work/bench-minutes.ts';
+export { withMinutes } from './work/with-minutes.ts';
 export { withRejects } from './work/with-rejects.ts';
 export * from './work/flow-time.ts';
 export * from './work/ways-of-working.ts';

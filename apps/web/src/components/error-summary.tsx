@@ -51,10 +51,20 @@ function SummaryLine({ error }: { error: SummaryError }) {
       className="font-semibold underline underline-offset-3"
       onClick={(event) => {
         event.preventDefault();
-        document.getElementById(fieldId)?.focus();
+        goTo(fieldId);
       }}
     >
       {message}
     </a>
   );
+}
+
+/** A field that stands in something closed is opened first. */
+function goTo(fieldId: string): void {
+  const field = document.getElementById(fieldId);
+  for (let around = field?.closest('details'); around;) {
+    around.open = true;
+    around = around.parentElement?.closest('details') ?? null;
+  }
+  field?.focus();
 }

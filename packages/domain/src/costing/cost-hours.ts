@@ -1,5 +1,5 @@
 import { type DecimalText, Exact, toAtMost } from '../numbers/decimal-text.ts';
-import { type BenchMinutes, type StepMinutes } from '../work/bench-minutes.ts';
+import type { BenchMinutes, StepMinutes } from '../work/bench-minutes.ts';
 import { ticketSteps, type WorkStep } from '../work/work-plan.ts';
 import type { CostLines } from './cost-lines.ts';
 import type { RunInput } from './run-input.ts';

@@ -1,6 +1,7 @@
 import type { RunInput } from '../costing/run-input.ts';
 import { type DecimalText, Exact, toText } from '../numbers/decimal-text.ts';
-import type { WorkPlan, WorkStep } from '../work/work-plan.ts';
+import { withMinutes } from '../work/with-minutes.ts';
+import type { WorkPlan } from '../work/work-plan.ts';
 import { priceRun } from './price-run.ts';
 import type { BreakNumbers } from './run-numbers.ts';
 
@@ -50,23 +51,13 @@ function shaken(input: RunInput, what: Shaken, toPercent: number): RunInput {
     const pricePerFt2 = new Exact(times(input.leather.pricePerFt2)).toDecimalPlaces(4).toFixed();
     return { ...input, leather: { ...input.leather, pricePerFt2 } };
   }
-  if (what === 'minutes') return { ...input, work: timesWork(input.work, times) };
+  if (what === 'minutes') return { ...input, work: withMinutes(input.work, String(toPercent)) };
   const rejects = (value: DecimalText) => Exact.min(99, times(value)).toFixed();
   return {
     ...input,
     work: rejectsWork(input.work, rejects),
     history: input.history && shakenHistory(input.history, toPercent),
   };
-}
-
-function timesWork(work: WorkPlan, times: (value: DecimalText) => DecimalText): WorkPlan {
-  if (work.kind === 'minutesPer100') return { ...work, minutes: times(work.minutes) };
-  const steps = work.steps.map((step): WorkStep => ({
-    ...step,
-    setupMinutes: times(step.setupMinutes),
-    secondsPerUnit: times(step.secondsPerUnit),
-  }));
-  return { ...work, steps };
 }
 
 function rejectsWork(work: WorkPlan, times: (value: DecimalText) => DecimalText): WorkPlan {

@@ -17,6 +17,11 @@ export const counterRoutes: RouteObject[] = [
           { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-quote.tsx') },
           { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./counter/quote.tsx') },
           {
+            path: ':id/workings',
+            handle: { crumb: numberOf },
+            lazy: () => import('./counter/quote-workings.tsx'),
+          },
+          {
             path: ':id/change',
             handle: { crumb: numberOf },
             lazy: () => import('./counter/change-quote.tsx'),

@@ -28,6 +28,7 @@ export function orderQuery(id: number) {
 }
 
 interface Asked {
+  option?: string | undefined;
   quantity?: number | undefined;
   by?: string | undefined;
 }

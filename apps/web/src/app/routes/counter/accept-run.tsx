@@ -9,11 +9,13 @@ import { TakeOnForm } from '../../../features/orders/components/take-on-form.tsx
 interface AcceptRunProps {
   quote: Quote;
   quantity: number;
+  /** The option that it is about; null for the piece as it is. */
+  option: string | null;
   className?: string;
 }
 
 /** From the question whether the shop can make it to the order that it takes on. */
-export function AcceptRun({ quote, quantity, className }: AcceptRunProps) {
+export function AcceptRun({ quote, quantity, option, className }: AcceptRunProps) {
   const navigate = useNavigate();
   const { orderId, orderNumber, state, inHandsOn } = quote;
   if (orderId !== null) {
@@ -30,7 +32,13 @@ export function AcceptRun({ quote, quantity, className }: AcceptRunProps) {
   if (state !== 'draft' && state !== 'sent' && state !== 'agreed') return null;
   return (
     <div className={className}>
-      <CanWeMakeIt quoteId={quote.id} quantity={quantity} by={inHandsOn ?? undefined}>
+      <CanWeMakeIt
+        key={option}
+        quoteId={quote.id}
+        quantity={quantity}
+        option={option ?? undefined}
+        by={inHandsOn ?? undefined}
+      >
         {(check) =>
           state === 'agreed' && (
             <TakeOnForm

@@ -1,3 +1,4 @@
+import { quoteTerms } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 import { PageHeader } from '../../../components/page-header.tsx';
@@ -63,9 +64,10 @@ function startingWith(
     ...(patternId !== undefined && { patternId }),
     title: '',
     inHandsOn: null,
-    breaks: [50, 100, 250].map((quantity) => ({ quantity, typedPrice: null })),
+    breaks: [50, 100, 250].map((quantity) => ({ quantity, typedPrice: null, rule: null })),
     tooling: [],
     message: '',
+    terms: quoteTerms.parse({}),
     overrides: {},
   };
 }

@@ -1,13 +1,16 @@
 import type { Quote } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
 import { PageTitle } from '../../../components/page-title.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { CanWeMakeIt } from '../../../features/orders/components/can-we-make-it.tsx';
 import { CustomerAnswer } from '../../../features/quotes/components/customer-answer.tsx';
 import { LayoutCard } from '../../../features/quotes/components/layout-card.tsx';
 import { OnePieceCard } from '../../../features/quotes/components/one-piece-card.tsx';
+import { ladderOf, OptionSwitch } from '../../../features/quotes/components/option-switch.tsx';
 import { OtherRevisions } from '../../../features/quotes/components/other-revisions.tsx';
 import { PriceBreaksCard } from '../../../features/quotes/components/price-breaks-card.tsx';
 import { QuantitiesCard } from '../../../features/quotes/components/quantities-card.tsx';
@@ -28,9 +31,12 @@ export function Component() {
   const { data: quote } = useSuspenseQuery(quoteQuery(id));
   const { data: session } = useSuspenseQuery(sessionQuery());
   const [quantity, choose] = useQuantity(quote);
+  const [picked, pickOption] = useState<string | null>(null);
+  const option = quote.state === 'agreed' ? quote.agreedOption : picked;
   const isOwner = session.person?.role === 'owner';
   const isMaker = session.person?.role === 'maker';
-  const rung = quote.numbers?.breaks.find((each) => each.quantity === quantity);
+  const ladder = quote.numbers && ladderOf(quote.numbers, option);
+  const rung = ladder?.breaks.find((each) => each.quantity === quantity);
   return (
     <>
       <PageTitle>{`Quote ${quote.number}`}</PageTitle>
@@ -40,7 +46,7 @@ export function Component() {
       />
       <Stitch className="my-5" />
       {isOwner && quote.state === 'agreed' && (
-        <AcceptRun quote={quote} quantity={quantity} className="mb-5" />
+        <AcceptRun quote={quote} quantity={quantity} option={option} className="mb-5" />
       )}
       <div className="grid items-start gap-5 lg:grid-cols-2 xl:grid-cols-[minmax(0,25.5rem)_minmax(0,1fr)_minmax(0,20rem)]">
         <LayoutCard
@@ -50,9 +56,12 @@ export function Component() {
           rung={rung}
         />
         <div className="space-y-5">
-          {quote.numbers && quote.input ? (
+          {quote.numbers && quote.state !== 'agreed' && (
+            <OptionSwitch options={quote.numbers.options} chosen={option} onChoose={pickOption} />
+          )}
+          {ladder && quote.input ? (
             <PriceBreaksCard
-              numbers={quote.numbers}
+              numbers={ladder}
               target={quote.input.targetPerHour}
               chosen={quantity}
               onChoose={choose}
@@ -61,10 +70,17 @@ export function Component() {
             <QuantitiesCard quote={quote} chosen={quantity} onChoose={choose} />
           )}
           {rung && quote.input && <OnePieceCard rung={rung} tooling={quote.input.tooling} />}
+          {rung && (
+            <TextLink to={`/counter/quotes/${quote.id}/workings?${workingsOf(quantity, option)}`}>
+              All workings: hours, costs, what to cut, what if
+            </TextLink>
+          )}
         </div>
         <div className="space-y-5 lg:col-span-2 xl:col-span-1">
-          <CustomerAnswer quote={quote} quantity={quantity} isOwner={isOwner} />
-          {isOwner && quote.state !== 'agreed' && <AcceptRun quote={quote} quantity={quantity} />}
+          <CustomerAnswer quote={quote} quantity={quantity} option={option} isOwner={isOwner} />
+          {isOwner && quote.state !== 'agreed' && (
+            <AcceptRun quote={quote} quantity={quantity} option={option} />
+          )}
           {isMaker && (
             <CanWeMakeIt quoteId={quote.id} quantity={quantity} by={quote.inHandsOn ?? undefined} />
           )}
@@ -74,6 +90,12 @@ export function Component() {
     </>
   );
 }
+
+const workingsOf = (quantity: number, option: string | null) =>
+  new URLSearchParams({
+    pieces: String(quantity),
+    ...(option !== null && { option }),
+  }).toString();
 
 /** The quantity that the page is about: the one agreed to, the one picked on the ladder, or the second. */
 function useQuantity(quote: Quote): [number, (quantity: number) => void] {

@@ -1,10 +1,13 @@
 import type { Offer } from '@hidewright/contract';
 import { Stitch } from '../../../components/stitch.tsx';
+import { rungsOf } from './rungs-of.ts';
 import { countText, longDayText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 
 /** What was agreed, to look up again whenever the link is opened. */
 export function OfferAgreed({ offer }: { offer: Offer }) {
-  const rung = offer.breaks.find((each) => each.quantity === offer.agreedQuantity);
+  const rung = rungsOf(offer, offer.agreedOption).find(
+    (each) => each.quantity === offer.agreedQuantity,
+  );
   if (!rung) return null;
   return (
     <section
@@ -13,6 +16,7 @@ export function OfferAgreed({ offer }: { offer: Offer }) {
     >
       <div role="status">
         <h2 id="agreed">{`You agreed to ${countText(rung.quantity)}`}</h2>
+        {offer.agreedOption !== null && <p>{offer.agreedOption}</p>}
         {offer.agreedOn && <p className="text-ink-soft">{`on ${longDayText(offer.agreedOn)}`}</p>}
       </div>
       <dl className="mt-3 space-y-1">
@@ -20,6 +24,9 @@ export function OfferAgreed({ offer }: { offer: Offer }) {
           word={`${countText(rung.quantity)} at ${unitPriceText(rung.priceEach)} each`}
           amount={rung.goodsTotal}
         />
+        {rung.charges.map(({ name, amount }) => (
+          <Line key={name} word={name} amount={amount} />
+        ))}
         {offer.tooling.map((tool) => (
           <Line key={tool.name} word={`${tool.name}, charged once`} amount={tool.charge} />
         ))}

@@ -5,7 +5,9 @@ import { ErrorSummary } from '../../../components/error-summary.tsx';
 import { ApiProblem } from '../../../lib/api-problem.ts';
 import { countText, moneyText } from '../../../lib/formatting.ts';
 import { useAgreeOffer } from '../offer.queries.ts';
+import { OptionCards } from './option-cards.tsx';
 import { QuantityCard } from './quantity-card.tsx';
+import { rungsOf } from './rungs-of.ts';
 import { ToolingLines } from './tooling-lines.tsx';
 
 /** How many, at what price; agreeing is one press, and a POST. */
@@ -15,7 +17,9 @@ export function OfferChoice({ offer, token }: { offer: Offer; token: string }) {
   const [chosen, setChosen] = useState(only);
   const [attempt, setAttempt] = useState(0);
   const [refusal, setRefusal] = useState<string>();
-  const rung = offer.breaks.find((each) => each.quantity === chosen);
+  const [option, setOption] = useState<string | null>(null);
+  const breaks = rungsOf(offer, option);
+  const rung = breaks.find((each) => each.quantity === chosen);
 
   async function agree() {
     setAttempt(attempt + 1);
@@ -25,7 +29,7 @@ export function OfferChoice({ offer, token }: { offer: Offer; token: string }) {
     }
     setRefusal(undefined);
     try {
-      await send.mutateAsync({ params: { token }, body: { quantity: chosen } });
+      await send.mutateAsync({ params: { token }, body: { quantity: chosen, option } });
     } catch (error) {
       setRefusal(
         error instanceof ApiProblem ? error.detail : 'That did not work. Try again in a moment.',
@@ -43,10 +47,11 @@ export function OfferChoice({ offer, token }: { offer: Offer; token: string }) {
       }}
     >
       {refusal && <ErrorSummary attempt={attempt} title={refusal} errors={[]} />}
+      <OptionCards offer={offer} chosen={option} onChoose={setOption} />
       <fieldset>
         <legend className="mb-1.5 font-semibold">How many?</legend>
         <div className="grid gap-1.5">
-          {offer.breaks.map((each) => (
+          {breaks.map((each) => (
             <QuantityCard
               key={each.quantity}
               rung={each}
@@ -59,7 +64,7 @@ export function OfferChoice({ offer, token }: { offer: Offer; token: string }) {
           ))}
         </div>
       </fieldset>
-      <ToolingLines offer={offer} />
+      <ToolingLines offer={offer} rung={rung} />
       <Button type="submit" tone="primary" size="bench" busy={send.isPending} className="w-full">
         {rung ? `Agree to ${countText(rung.quantity)}, ${moneyText(rung.total)}` : 'Agree'}
       </Button>

@@ -14,13 +14,14 @@ interface CanWeMakeItProps {
   quoteId: number;
   /** Where it begins; the day can be changed. */
   quantity?: number;
+  option?: string | undefined;
   by?: string | undefined;
   /** What follows from the answer, such as taking the order on. */
   children?: (check: RunCheck) => ReactNode;
 }
 
 /** Can we make it? Yes, or exactly what is short: leather, hardware, tooling, bench hours, by that day. */
-export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProps) {
+export function CanWeMakeIt({ quoteId, quantity, option, by, children }: CanWeMakeItProps) {
   const { today } = useWorkshop();
   const id = useId();
   const [chosen, setChosen] = useState(by !== undefined && by >= today ? by : undefined);
@@ -28,7 +29,7 @@ export function CanWeMakeIt({ quoteId, quantity, by, children }: CanWeMakeItProp
     data: check,
     error,
     isFetching,
-  } = useQuery(checkQuery(quoteId, { quantity, by: chosen }));
+  } = useQuery(checkQuery(quoteId, { quantity, option, by: chosen }));
   return (
     <Card title="Can we make it?">
       <div className="mb-4 flex flex-wrap items-end gap-x-4 gap-y-2">

@@ -1,4 +1,10 @@
-import type { BreakNumbers, CostKind, CostLine, RunInput } from '@hidewright/domain';
+import {
+  hourlyKinds,
+  type BreakNumbers,
+  type CostKind,
+  type CostLine,
+  type RunInput,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { useState } from 'react';
 import { Card } from '../../../components/card.tsx';
@@ -46,9 +52,13 @@ export function OnePieceCard({ rung, tooling }: OnePieceCardProps) {
 const words: [CostKind, string][] = [
   ['leather', 'leather'],
   ['hardware', 'hardware'],
+  ['supplies', 'supplies'],
   ['packing', 'packing'],
+  ['carriage', 'carriage'],
+  ['fees', 'card fees'],
   ['wages', 'wages'],
   ['desk', 'desk time'],
+  ['overhead', 'overhead'],
 ];
 
 function linesOf(rung: BreakNumbers, onOpen: (kind: CostKind) => void): WaterfallLine[] {
@@ -56,12 +66,15 @@ function linesOf(rung: BreakNumbers, onOpen: (kind: CostKind) => void): Waterfal
     const amount = eachOf(rung.costLines, kind, rung.quantity);
     if (amount === undefined) return [];
     const label = kind === 'wages' ? `${word}, ${minutesEach(rung)} min` : word;
-    const isWork = kind === 'wages' || kind === 'desk';
+    const isWork = hourlyKinds.includes(kind);
     return [{ label, amount, kind: isWork ? 'work' : 'bought', onOpen: () => onOpen(kind) }];
   });
-  const left = costs.reduce((rest, line) => rest.minus(line.amount), new Decimal(rung.priceEach));
+  const once = rung.charges.reduce((sum, { amount }) => sum.plus(amount), new Decimal(0));
+  const price = once.div(rung.quantity).plus(rung.priceEach);
+  const left = costs.reduce((rest, line) => rest.minus(line.amount), price);
+  const word = once.isZero() ? 'price' : 'price, charges shared';
   return [
-    { label: 'price', amount: rung.priceEach, kind: 'price' },
+    { label: word, amount: price.toFixed(4), kind: 'price' },
     ...costs,
     { label: 'left', amount: left.toFixed(4), kind: 'left' },
   ];

@@ -1,4 +1,5 @@
 import type { RunBasis } from '@hidewright/contract';
+import { goodShare } from '@hidewright/domain';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { percentText, unitPriceText } from '../../../lib/formatting.ts';
@@ -6,7 +7,7 @@ import { percentText, unitPriceText } from '../../../lib/formatting.ts';
 /** Values that are worked out or looked up, and can be set by hand for this quote alone. */
 export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
   if (!basis) return null;
-  const { work, leather } = basis.input;
+  const { leather } = basis.input;
   return (
     <details>
       <summary className="rounded py-1 font-semibold">Set by hand, for this quote alone</summary>
@@ -18,20 +19,17 @@ export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
           optional
           help={`${leather.name} is ${unitPriceText(leather.pricePerFt2)} per ft².`}
         />
-        {work.kind === 'minutesPer100' ? (
-          <DecimalField
-            name="overrides.rejectPercent"
-            label="Rejects"
-            unit="%"
-            optional
-            help={`The pattern says ${percentText(work.rejectPercent)}.`}
-          />
-        ) : (
-          <p className="text-sm text-ink-soft">
-            This pattern has its rejects at each step; change them there.
-          </p>
-        )}
+        <DecimalField
+          name="overrides.rejectPercent"
+          label="Rejects"
+          unit="%"
+          optional
+          help={`The pattern says ${percentText(rejectsOf(basis))}${basis.input.history ? ', and its own runs are counted with' : ''}.`}
+        />
       </div>
     </details>
   );
 }
+
+/** Of all pieces cut, over all steps. */
+const rejectsOf = ({ input }: RunBasis): string => ((1 - goodShare(input.work)) * 100).toFixed(1);

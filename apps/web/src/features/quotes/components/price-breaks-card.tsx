@@ -1,6 +1,6 @@
-import type { RunNumbers } from '@hidewright/domain';
+import type { BreakNumbers, RunNumbers } from '@hidewright/domain';
 import { Card } from '../../../components/card.tsx';
-import { KeyFigures } from '../../../components/key-figures.tsx';
+import { KeyFigures, type KeyFigure } from '../../../components/key-figures.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { PriceLadder } from '../../../components/price-ladder.tsx';
 import {
@@ -34,8 +34,8 @@ export function PriceBreaksCard({ numbers, target, chosen, onChoose }: PriceBrea
       />
       <p className="mt-2 text-sm text-ink-soft">
         Bench: left after everything bought, by bench hours. All in, the mark on the rung: after
-        wages too, by all hours, desk time included. Margin: what remains of the total after all
-        costs.
+        wages and overhead too, by all hours, desk time and packing included. Margin: what remains
+        of the total after all costs.
       </p>
       <TypedPrices numbers={numbers} />
       <Warnings numbers={numbers} chosen={chosen} />
@@ -85,7 +85,10 @@ function Warnings({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 'c
 function ChosenRung({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 'chosen'>) {
   const rung = numbers.breaks.find((each) => each.quantity === chosen);
   if (!rung) return null;
-  const tooled = Number(rung.toolingCharge) > 0;
+  const beside = [
+    ...(Number(rung.toolingCharge) > 0 ? [`tooling ${moneyText(rung.toolingCharge)}`] : []),
+    ...rung.charges.map(({ name, amount }) => `${name.toLowerCase()} ${moneyText(amount)}`),
+  ];
   return (
     <div className="mt-4">
       <KeyFigures
@@ -93,7 +96,7 @@ function ChosenRung({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 
           {
             word: `${countText(rung.quantity)} come to`,
             figure: moneyText(rung.total),
-            note: tooled ? `tooling ${moneyText(rung.toolingCharge)} of it` : undefined,
+            note: beside.length > 0 ? `${beside.join(', ')} of it` : undefined,
           },
           {
             word: 'margin',
@@ -106,8 +109,27 @@ function ChosenRung({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 
             figure: hoursText(rung.benchMinutes),
             note: `all hours ${hoursText(rung.allMinutes)}`,
           },
+          ...againAndSoldOn(rung),
         ]}
       />
     </div>
   );
+}
+
+/** The same order a second time, and what the customer makes of it. */
+function againAndSoldOn(rung: BreakNumbers): KeyFigure[] {
+  return [
+    ...(Number(rung.toolingCharge) > 0
+      ? [{ word: 'a later order', figure: moneyText(rung.reorderTotal), note: 'tooling paid for' }]
+      : []),
+    ...(rung.resaleMarginPercent === null
+      ? []
+      : [
+          {
+            word: 'sold on',
+            figure: percentText(rung.resaleMarginPercent),
+            note: 'of its price stays with the shop that sells it',
+          },
+        ]),
+  ];
 }

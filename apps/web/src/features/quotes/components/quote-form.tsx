@@ -1,4 +1,5 @@
-import { quoteBody, type QuoteBody } from '@hidewright/contract';
+import { quoteBody, type QuoteBody, type QuoteTerms } from '@hidewright/contract';
+import type { RunInput } from '@hidewright/domain';
 import type { ReactNode } from 'react';
 import type { z } from 'zod';
 import { Card } from '../../../components/card.tsx';
@@ -12,10 +13,12 @@ import { TextField } from '../../../components/text-field.tsx';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { usePreview } from '../use-preview.ts';
 import { CustomerField } from './customer-field.tsx';
+import { OptionFields } from './option-fields.tsx';
 import { OverrideFields } from './override-fields.tsx';
 import { PatternField } from './pattern-field.tsx';
 import { QuotePreview } from './quote-preview.tsx';
 import { RungFields } from './rung-fields.tsx';
+import { TermsFields } from './terms-fields.tsx';
 import { ToolingFields } from './tooling-fields.tsx';
 
 export type TypedQuote = z.input<typeof quoteBody>;
@@ -89,6 +92,8 @@ function QuoteFields({
           <Stitch />
           <ToolingFields suggestions={toolsFor(basis)} />
           <Stitch />
+          <OptionFields basis={basis} numbers={numbers} />
+          <TermsFields basis={basis} />
           <OverrideFields basis={basis} />
           <TextArea name="message" label="Message to the customer" rows={3} optional />
         </div>
@@ -112,6 +117,8 @@ export function typedOf(quote: {
   title: string;
   inHandsOn: string | null;
   breaks: readonly { quantity: number; typedPrice?: string | null | undefined }[];
+  input?: Pick<RunInput, 'breaks'> | undefined;
+  terms?: QuoteTerms | undefined;
   tooling: readonly { name: string; cost?: string | undefined; charge?: string | undefined }[];
   message?: string | undefined;
   overrides: QuoteBody['overrides'];
@@ -124,7 +131,9 @@ export function typedOf(quote: {
     breaks: quote.breaks.map(({ quantity, typedPrice }) => ({
       quantity,
       typedPrice: typedPrice ?? null,
+      rule: quote.input?.breaks.find((each) => each.quantity === quantity)?.rule ?? null,
     })),
+    terms: quote.terms,
     tooling: quote.tooling.map(({ name, cost = '0', charge = '0' }) => ({ name, cost, charge })),
     message: quote.message ?? '',
     overrides: quote.overrides,

@@ -3,6 +3,7 @@ import { EmptyState } from '../../../components/empty-state.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import type { PreviewSoFar } from '../use-preview.ts';
 import { LayoutCard } from './layout-card.tsx';
+import { ladderOf, OptionSwitch } from './option-switch.tsx';
 import { OnePieceCard } from './one-piece-card.tsx';
 import { PriceBreaksCard } from './price-breaks-card.tsx';
 
@@ -13,6 +14,7 @@ const beside =
 /** What the quote would look like if it were saved now. */
 export function QuotePreview({ basis, preview }: PreviewSoFar) {
   const [picked, setPicked] = useState<number>();
+  const [option, setOption] = useState<string | null>(null);
   if (!basis || !preview) {
     return <EmptyState title="Choose a pattern, and its numbers appear here." />;
   }
@@ -32,10 +34,12 @@ export function QuotePreview({ basis, preview }: PreviewSoFar) {
       </div>
     );
   }
-  const { numbers, input } = preview;
+  const { input } = preview;
+  const numbers = ladderOf(preview.numbers, option);
   const rung = rungAt(numbers.breaks, picked);
   return (
     <div className={beside}>
+      <OptionSwitch options={preview.numbers.options} chosen={option} onChoose={setOption} />
       {rung && (
         <PriceBreaksCard
           numbers={numbers}

@@ -2,6 +2,7 @@ import { Plus, X } from 'lucide-react';
 import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
+import { PriceRuleField } from '../../../components/price-rule-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { unitPriceText } from '../../../lib/formatting.ts';
 
@@ -37,7 +38,7 @@ export function RungFields({ workedOut }: RungFieldsProps) {
           className="mt-2 -ml-3"
           onClick={() =>
             append(
-              { quantity: '', typedPrice: null },
+              { quantity: '', typedPrice: null, rule: null },
               { focusName: `breaks.${fields.length}.quantity` },
             )
           }
@@ -69,6 +70,7 @@ function RungRow({ at, workedOut, onRemove }: RungRowProps) {
           whenEmpty="null"
         />
         <WorkedOutPrice at={at} workedOut={workedOut} />
+        <OwnRule at={at} />
       </div>
       {onRemove && (
         <button
@@ -81,6 +83,23 @@ function RungRow({ at, workedOut, onRemove }: RungRowProps) {
         </button>
       )}
     </div>
+  );
+}
+
+/** A rule for this quantity alone, out of the way until it is wanted. */
+function OwnRule({ at }: { at: number }) {
+  const rule = useWatch({ name: `breaks.${at}.rule` }) as unknown;
+  return (
+    <details open={rule !== null && rule !== undefined ? true : undefined}>
+      <summary className="min-h-8 rounded py-1 text-sm text-ink-soft">a rule of its own</summary>
+      <div className="mt-1">
+        <PriceRuleField
+          name={`breaks.${at}.rule`}
+          label={`Worked out, quantity ${at + 1}`}
+          emptyWord="as the others"
+        />
+      </div>
+    </details>
   );
 }
 
