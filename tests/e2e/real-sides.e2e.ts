@@ -1,3 +1,4 @@
+import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
 import { keyboardAlone } from '../support/hands.ts';
@@ -11,8 +12,31 @@ beforeAll(async () => {
 });
 afterAll(async () => {
   await closeBrowser();
-  await hidewright.stop();
+  expect(await hidewright.stop()).toBe(0);
 });
+
+/** A side of that leather which is drawn, without flaws. */
+async function drawnSideOf(page: Page, leather: RegExp): Promise<number> {
+  const { request } = page;
+  const read = await request.get(`${hidewright.url}/api/lots?onRack=yes&limit=200`);
+  const side = ((await read.json()) as Named).items
+    .filter(({ form, leatherName }) => form === 'side' && leather.test(leatherName))
+    .at(-1);
+  const drawing = `${hidewright.url}/api/lots/${side?.id}/drawing`;
+  const { version } = (await (await request.get(drawing)).json()) as { version: number };
+  const outline = [
+    { x: 0, y: 0 },
+    { x: 1900, y: 0 },
+    { x: 1800, y: 950 },
+    { x: 100, y: 1000 },
+  ];
+  const drawn = await request.put(drawing, {
+    headers: { 'If-Match': `"${version}"` },
+    data: { outline, flaws: [], usablePercent: '85' },
+  });
+  expect(drawn.status()).toBe(200);
+  return Number(side?.id);
+}
 
 interface Named {
   items: { id: number; tag: string; name: string; form: string; leatherName: string }[];
@@ -54,6 +78,30 @@ walk('a side is drawn with its flaws by keyboard and finger, and laid out', asyn
   await page.getByText(/no layout gives more than/).waitFor({ timeout: 120_000 });
   await page.getByRole('button', { name: 'Larger' }).click();
   await expectAccessible(page);
+});
+
+walk('the most pieces of a side are looked for, and the search is stopped', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'owner');
+  const lotId = await drawnSideOf(page, /russet/);
+  await visit(page, `${hidewright.url}/stockroom/lots/${lotId}`);
+  await keyboardAlone.choose(page.getByLabel('Pattern', { exact: true }), 'Luggage tag with neck');
+  await keyboardAlone.check(page.getByRole('radio', { name: /As many as can be found/ }));
+  await keyboardAlone.press(page.getByRole('button', { name: 'Lay it out' }));
+
+  const bar = page.getByRole('progressbar', { name: 'Search for the most pieces' });
+  await bar.waitFor({ timeout: 60_000 });
+  await keyboardAlone.press(page.getByRole('button', { name: 'Stop, this will do' }));
+  await page.getByText('Stopped. This is the most found so far.').waitFor();
+  await page.getByText(/no layout gives more than/).waitFor();
+  expect(await bar.count()).toBe(0);
+  await expectAccessible(page);
+
+  await keyboardAlone.press(page.getByRole('button', { name: 'Lay it out' }));
+  const share = async () => Number(await bar.getAttribute('aria-valuenow'));
+  await expect.poll(share, { timeout: 60_000 }).toBeGreaterThan(0);
+  await page.getByText(/^Looking for more: \d+ so far$/).waitFor();
+  await expectAccessible(page);
+  await page.getByText('The most that could be found.').waitFor({ timeout: 120_000 });
 });
 
 walk('what a run is best cut from', async ({ page }) => {

@@ -1,6 +1,7 @@
 import { mkdir } from 'node:fs/promises';
 import path from 'node:path';
 import { MikroORM } from '@mikro-orm/sqlite';
+import type { LotLayout } from '@hidewright/contract';
 import { pino, type Logger } from 'pino';
 import { databaseFile, type Config } from './config.ts';
 import { assertSound } from './db/sound.ts';
@@ -11,6 +12,7 @@ import { FileStore } from './outside/file-store.ts';
 import { connectMail, type Mailer } from './outside/mailer.ts';
 import { papers, type Papers } from './papers/papers.ts';
 import { startWorkers, type Workers } from './workers/pool.ts';
+import { Searches } from './workers/searches.ts';
 
 /** What a request needs, built once and handed in. */
 export interface Context {
@@ -22,6 +24,8 @@ export interface Context {
   files: FileStore;
   papers: Papers;
   workers: Workers;
+  /** Long searches under way. */
+  searches: Searches<LotLayout>;
 }
 
 /** Opens the data folder and what lies in it; `clock` is the system's unless a test or the demo brings its own. */
@@ -47,6 +51,7 @@ export async function createContext(
     files: new FileStore(path.join(config.dataDir, 'files')),
     papers,
     workers: startWorkers(config),
+    searches: new Searches(),
   };
 }
 
@@ -62,6 +67,7 @@ async function assertMode(orm: MikroORM, { mode, dataDir }: Config): Promise<voi
 }
 
 export async function closeContext(context: Context): Promise<void> {
+  await context.searches.close();
   await context.workers.close();
   await context.orm.close(true);
 }

@@ -27,6 +27,8 @@ export interface Endpoint<
   readonly reply: Reply;
   /** 201, and an `Idempotency-Key` is honoured. */
   readonly creates?: boolean;
+  /** 202: the work goes on after the reply. Asking again joins it, so no key is needed. */
+  readonly starts?: boolean;
   /** The `If-Match` header must name the version that was read. */
   readonly edits?: boolean;
   /** The reply is a file, sent as it is: `reply` then describes nothing. */
@@ -41,6 +43,12 @@ export function endpoint<
   Body extends z.ZodType = z.ZodUndefined,
 >(definition: Endpoint<Params, Query, Body, Reply>): Endpoint<Params, Query, Body, Reply> {
   return definition;
+}
+
+/** The status of a reply that is no refusal. */
+export function statusOf({ creates, starts }: Endpoint): 200 | 201 | 202 {
+  if (creates === true) return 201;
+  return starts === true ? 202 : 200;
 }
 
 export type ParamsOf<E> =

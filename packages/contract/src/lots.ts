@@ -162,7 +162,7 @@ export const drawLot = endpoint({
 });
 
 /** How a pattern's pieces lie on a lot as it is drawn. */
-const lotLayout = z
+export const lotLayout = z
   .object({
     ...lie,
     lotId: id,

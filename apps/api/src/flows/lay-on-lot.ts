@@ -12,13 +12,15 @@ import { Lot } from '../modules/lots/lot.entity.ts';
 import { Pattern } from '../modules/patterns/pattern.entity.ts';
 import { definitionOf, latestVersion } from '../modules/patterns/pattern-versions.ts';
 
-/** A pattern laid on a lot, with the names that go with it. */
+/** A pattern and a lot as they are drawn, with the names that go with them. */
+export interface AskedOfLot {
+  names: Pick<LotLayout, 'lotId' | 'tag' | 'patternId' | 'patternName' | 'outlinePath'>;
+  input: SideInput;
+}
+
+/** A pattern laid on a lot. */
 export interface LaidOnLot {
-  lotId: number;
-  tag: string;
-  patternId: number;
-  patternName: string;
-  outlinePath: string;
+  names: AskedOfLot['names'];
   worked: Worked<SideInput, SideLayout>;
 }
 
@@ -32,7 +34,17 @@ export async function layOnLot(
   lotId: number,
   { patternId, search }: { patternId: number; search: 'rows' | 'best' },
 ): Promise<LaidOnLot> {
-  const em = context.orm.em.fork();
+  const { names, input } = await askOfLot(context, lotId, patternId);
+  return { names, worked: await sideLayoutFor(context, { ...input, search }) };
+}
+
+/** @throws {Problem} 404, 422 where the lot or the pattern is not drawn */
+export async function askOfLot(
+  { orm }: Pick<Context, 'orm'>,
+  lotId: number,
+  patternId: number,
+): Promise<AskedOfLot> {
+  const em = orm.em.fork();
   const lot = await em.findOne(Lot, lotId);
   if (lot === null) throw notFound('lot');
   const pattern = await em.findOne(Pattern, patternId);
@@ -40,14 +52,15 @@ export async function layOnLot(
   const definition = definitionOf(await latestVersion({ em }, pattern));
   const input = sideInputOf(lot, definition);
   if (typeof input === 'string') throw fault(input);
-  const worked = await sideLayoutFor(context, { ...input, search });
   return {
-    lotId,
-    tag: lot.tag,
-    patternId,
-    patternName: pattern.name,
-    outlinePath: outlinePath(input.outline),
-    worked,
+    names: {
+      lotId,
+      tag: lot.tag,
+      patternId,
+      patternName: pattern.name,
+      outlinePath: outlinePath(input.outline),
+    },
+    input,
   };
 }
 
@@ -62,7 +75,7 @@ export function sideInputOf(lot: Lot, definition: PatternDefinition): SideInput 
   };
 }
 
-export function laidOnLotReply({ worked, ...names }: LaidOnLot): LotLayout {
+export function laidOnLotReply({ worked, names }: LaidOnLot): LotLayout {
   return { ...names, ...worked.layout };
 }
 

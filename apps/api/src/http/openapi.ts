@@ -5,7 +5,7 @@ import {
   type RouteConfig,
 } from '@asteasolutions/zod-to-openapi';
 import { z } from 'zod';
-import { endpoints, problem, type Endpoint } from '@hidewright/contract';
+import { endpoints, problem, statusOf, type Endpoint } from '@hidewright/contract';
 
 extendZodWithOpenApi(z);
 
@@ -42,7 +42,7 @@ function describe(endpoint: Endpoint): RouteConfig {
     summary: endpoint.summary,
     request,
     responses: {
-      [endpoint.creates === true ? 201 : 200]: replyOf(endpoint),
+      [statusOf(endpoint)]: replyOf(endpoint),
       default: problemReply,
     },
     'x-access': endpoint.access,

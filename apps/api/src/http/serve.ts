@@ -1,5 +1,6 @@
 import type { Request, RequestHandler, Response, Router } from 'express';
 import {
+  statusOf,
   withoutConfidential,
   type Access,
   type Endpoint,
@@ -99,8 +100,6 @@ async function perform(
     once(work, key, statusOf(endpoint), () => run(work)),
   );
 }
-
-const statusOf = (endpoint: Endpoint) => (endpoint.creates === true ? 201 : 200);
 
 export function sendReply(
   endpoint: Endpoint,

@@ -11,6 +11,11 @@ export async function layOutSide(input) {
   return work(input);
 }
 
+export async function searchSide(work) {
+  const { searchSide: search } = await tsImport('./layout.ts', import.meta.url);
+  return search(work);
+}
+
 export async function salesSheet(request) {
   const { salesSheet: work } = await tsImport('./sheet.ts', import.meta.url);
   return work(request);

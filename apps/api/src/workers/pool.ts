@@ -8,8 +8,9 @@ import {
   type SideLayout,
 } from '@hidewright/domain';
 import { databaseFile, type Config } from '../config.ts';
-import type { LayoutAnswer } from './layout.ts';
+import type { LayoutAnswer, SideFound } from './layout.ts';
 import type { SheetRequest } from './sheet.ts';
+import { watched, type SearchWatch } from './watched.ts';
 
 /** Heavy work, done off the main thread; each kind has one entry. */
 export interface Workers {
@@ -17,6 +18,8 @@ export interface Workers {
   layOut(input: LayoutInput): Promise<Layout>;
   /** The same on a drawn side. @throws {NotWorkable} */
   layOutSide(input: SideInput): Promise<SideLayout>;
+  /** The same while somebody watches, who may stop it. @throws {NotWorkable} */
+  searchSide(input: SideInput, watch: SearchWatch): Promise<SideFound>;
   /** The bytes of the sales sheet of a period. */
   salesSheet(period: Omit<SheetRequest, 'database'>): Promise<Uint8Array>;
   close(): Promise<void>;
@@ -36,6 +39,12 @@ export function startWorkers(config: Config): Workers {
     layOut: async (input) => layoutOf<Layout>(await pool.run(input, { name: 'layOut' })),
     layOutSide: async (input) =>
       layoutOf<SideLayout>(await pool.run(input, { name: 'layOutSide' })),
+    searchSide: (input, watch) =>
+      watched(input, watch, async (work) =>
+        layoutOf<SideFound>(
+          await pool.run(work, { name: 'searchSide', transferList: [work.port] }),
+        ),
+      ),
     salesSheet: (period) =>
       pool.run({ ...period, database }, { name: 'salesSheet' }) as Promise<Uint8Array>,
     close: () => pool.close(),

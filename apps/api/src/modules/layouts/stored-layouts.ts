@@ -48,13 +48,16 @@ export async function layoutFor(
   );
 }
 
-/** The layout of pieces on a drawn side, found or worked out in the same way. */
+/**
+ * The layout of pieces on a drawn side, found or worked out in the same way.
+ * @param workOut how, where it is not known: by a worker, unless said
+ */
 export async function sideLayoutFor(
   context: Pick<Context, 'orm' | 'workers'>,
   input: SideInput,
+  workOut: () => Promise<SideLayout> = () => context.workers.layOutSide(input),
 ): Promise<Worked<SideInput, SideLayout>> {
-  const inputHash = sha256(layoutInputKey(input));
-  return workedOnce(context, input, inputHash, () => context.workers.layOutSide(input));
+  return workedOnce(context, input, sha256(layoutInputKey(input)), workOut);
 }
 
 async function workedOnce<Source, Laid>(

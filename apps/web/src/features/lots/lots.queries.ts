@@ -1,4 +1,4 @@
-import { listLots, readLot, readLotDrawing } from '@hidewright/contract';
+import { listLots, readLot, readLotDrawing, readLotSearch } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -33,5 +33,17 @@ export function lotDrawingQuery(id: number) {
   return queryOptions({
     queryKey: ['lots', id, 'drawing'],
     queryFn: ({ signal }) => call(readLotDrawing, { params: { id }, signal }),
+  });
+}
+
+const lookAgainMs = 400;
+
+/** A search for the most pieces, asked after until it has ended. */
+export function lotSearchQuery(id: string) {
+  return queryOptions({
+    queryKey: ['searches', id],
+    queryFn: ({ signal }) => call(readLotSearch, { params: { id }, signal }),
+    refetchInterval: ({ state: { data, error } }) =>
+      error === null && (data === undefined || data.state === 'looking') && lookAgainMs,
   });
 }

@@ -1,14 +1,9 @@
 import type { LayoutSource } from '@hidewright/contract';
 import { DomainError, handCount, layOut, type Layout, type Watch } from '@hidewright/domain';
+import type { Searching } from '../../components/search-progress.tsx';
 
 /** A layout, or the sentence that says why there is none. */
 export type LaidOut = { layout: Layout } | { refusal: string };
-
-/** How far a search has come: a share from 0 to 1, and the pieces found so far. */
-export interface Searching {
-  done: number;
-  pieces: number;
-}
 
 /** What the worker says: how far it is, and in the end the answer. */
 export type LayoutNews = { searching: Searching } | { answer: LaidOut };

@@ -1,6 +1,7 @@
 import type { LayoutSource } from '@hidewright/contract';
 import { useEffect, useState } from 'react';
-import type { LaidOut, LayoutNews, Searching } from './laid-out.ts';
+import type { Searching } from '../../components/search-progress.tsx';
+import type { LaidOut, LayoutNews } from './laid-out.ts';
 
 interface Preview {
   /** Of the last input that could be laid out; what is typed now may not be answered yet. */

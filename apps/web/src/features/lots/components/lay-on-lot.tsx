@@ -1,4 +1,4 @@
-import { layOnLot, type LotLayout } from '@hidewright/contract';
+import { layOnLot, type BodyInputOf, type LotLayout } from '@hidewright/contract';
 import { useState } from 'react';
 import { Card } from '../../../components/card.tsx';
 import { Form } from '../../../components/form.tsx';
@@ -8,8 +8,9 @@ import { RadioCards } from '../../../components/radio-cards.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { areaText, countText, percentText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { useLayOnLot } from '../lots.mutations.ts';
+import { useLayOnLot, useStartLotSearch } from '../lots.mutations.ts';
 import { boxOf } from '../side-sketch.ts';
+import { RunningSearch } from './running-search.tsx';
 
 const searches = [
   { value: 'rows', label: 'In rows', detail: 'which a hand repeats with the die' },
@@ -24,7 +25,19 @@ interface LayOnLotProps {
 /** How many pieces of a pattern this very side gives, around its flaws. */
 export function LayOnLot({ lotId, patterns }: LayOnLotProps) {
   const send = useLayOnLot();
-  const [laid, setLaid] = useState<LotLayout>();
+  const start = useStartLotSearch();
+  const [answer, setAnswer] = useState<{ laid: LotLayout } | { searchId: string }>();
+
+  async function lay({ patternId, search }: BodyInputOf<typeof layOnLot>) {
+    const params = { id: lotId };
+    if (search === 'best') {
+      const { id } = await start.mutateAsync({ params, body: { patternId } });
+      setAnswer({ searchId: id });
+    } else {
+      setAnswer({ laid: await send.mutateAsync({ params, body: { patternId, search } }) });
+    }
+  }
+
   return (
     <Card title="What it gives" subtitle="pieces of a pattern, clear of edge and flaws">
       <Form
@@ -32,7 +45,7 @@ export function LayOnLot({ lotId, patterns }: LayOnLotProps) {
         defaults={{ patternId: '' as unknown as number, search: 'rows' }}
         submitWord="Lay it out"
         submitTone="secondary"
-        onSend={async (body) => setLaid(await send.mutateAsync({ params: { id: lotId }, body }))}
+        onSend={lay}
       >
         <SelectField
           name="patternId"
@@ -42,7 +55,12 @@ export function LayOnLot({ lotId, patterns }: LayOnLotProps) {
         />
         <RadioCards name="search" label="How" cards={searches} across />
       </Form>
-      {laid && <Laid laid={laid} />}
+      {answer && 'laid' in answer && <Laid laid={answer.laid} />}
+      {answer && 'searchId' in answer && (
+        <RunningSearch key={answer.searchId} id={answer.searchId}>
+          {(laid) => <Laid laid={laid} />}
+        </RunningSearch>
+      )}
     </Card>
   );
 }

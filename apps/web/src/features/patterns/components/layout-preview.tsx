@@ -10,11 +10,11 @@ import { useFormContext, useWatch } from 'react-hook-form';
 import { Card } from '../../../components/card.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { OutlinePicture } from '../../../components/outline-picture.tsx';
+import { SearchProgress } from '../../../components/search-progress.tsx';
 import { layoutSubtitle } from '../layout-words.ts';
 import { layoutBody } from '../typed-pattern.ts';
 import { useLayoutPreview } from '../use-layout-preview.ts';
 import { LayoutDrawing } from './layout-drawing.tsx';
-import { SearchProgress } from './search-progress.tsx';
 
 /** The outline and its layout, drawn while they are typed. */
 export function LayoutPreview() {
@@ -35,6 +35,7 @@ export function LayoutPreview() {
         {searching && (
           <SearchProgress
             searching={searching}
+            stopWord="Stop, rows will do"
             onStop={() => setValue('definition.layoutBy', 'outline', { shouldDirty: true })}
           />
         )}

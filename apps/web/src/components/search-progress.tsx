@@ -1,15 +1,22 @@
-import { Button } from '../../../components/button.tsx';
-import { countText } from '../../../lib/formatting.ts';
-import type { Searching } from '../laid-out.ts';
+import { countText } from '../lib/formatting.ts';
+import { Button } from './button.tsx';
+
+/** How far a search has come: a share from 0 to 1, and the pieces found so far. */
+export interface Searching {
+  done: number;
+  pieces: number;
+}
 
 interface SearchProgressProps {
   searching: Searching;
-  /** Goes back to rows. */
+  stopWord: string;
+  /** While it is being stopped. */
+  stopping?: boolean | undefined;
   onStop: () => void;
 }
 
 /** How far the search for the most pieces has come, and the way out of it. */
-export function SearchProgress({ searching, onStop }: SearchProgressProps) {
+export function SearchProgress({ searching, stopWord, stopping, onStop }: SearchProgressProps) {
   const percent = Math.round(Math.min(1, searching.done) * 100);
   return (
     <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
@@ -26,7 +33,9 @@ export function SearchProgress({ searching, onStop }: SearchProgressProps) {
           <div className="h-full bg-verdigris" style={{ width: `${percent}%` }} />
         </div>
       </div>
-      <Button onClick={onStop}>Stop, rows will do</Button>
+      <Button busy={stopping} onClick={onStop}>
+        {stopWord}
+      </Button>
     </div>
   );
 }
