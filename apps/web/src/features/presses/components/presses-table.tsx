@@ -1,8 +1,7 @@
 import type { PressReply } from '@hidewright/contract';
-import { useMemo, useState, type ReactNode } from 'react';
-import { Button } from '../../../components/button.tsx';
+import { useMemo, type ReactNode } from 'react';
 import type { Column } from '../../../components/column.ts';
-import { DataTable } from '../../../components/data-table.tsx';
+import { NamedTable } from '../../../components/named-table.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { lengthText, numberText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
@@ -51,20 +50,6 @@ function columnsFor(unit: LengthUnit): Column<PressReply>[] {
   ];
 }
 
-function changeColumn(onChange: (press: PressReply) => void): Column<PressReply> {
-  return {
-    id: 'change',
-    header: 'Change',
-    value: () => null,
-    cell: (row) => (
-      <Button onClick={() => onChange(row)}>
-        Change<span className="sr-only"> {row.name}</span>
-      </Button>
-    ),
-    sortable: false,
-  };
-}
-
 interface PressesTableProps {
   rows: readonly PressReply[];
   empty: ReactNode;
@@ -73,28 +58,18 @@ interface PressesTableProps {
 
 export function PressesTable({ rows, empty, mayChange }: PressesTableProps) {
   const { lengthUnit } = useWorkshop();
-  const [changing, setChanging] = useState<PressReply>();
-  const columns = useMemo(
-    () => [...columnsFor(lengthUnit), ...(mayChange ? [changeColumn(setChanging)] : [])],
-    [lengthUnit, mayChange],
-  );
+  const columns = useMemo(() => columnsFor(lengthUnit), [lengthUnit]);
   return (
-    <>
-      <DataTable
-        label="Presses"
-        rows={rows}
-        rowId={(row) => row.id}
-        columns={columns}
-        empty={empty}
-        sortedBy={{ id: 'name' }}
-      />
-      {changing && (
-        <ChangePressDialog
-          key={changing.id}
-          press={changing}
-          onClose={() => setChanging(undefined)}
-        />
-      )}
-    </>
+    <NamedTable
+      label="Presses"
+      rows={rows}
+      columns={columns}
+      empty={empty}
+      changing={
+        mayChange
+          ? (press, close) => <ChangePressDialog key={press.id} press={press} onClose={close} />
+          : undefined
+      }
+    />
   );
 }

@@ -12,11 +12,10 @@ import { taxRatesQuery } from '../tax-rates.queries.ts';
 
 interface ChangeTaxRateDialogProps {
   rate: TaxRate;
-  open: boolean;
-  onOpenChange: (open: boolean) => void;
+  onClose: () => void;
 }
 
-export function ChangeTaxRateDialog({ rate, open, onOpenChange }: ChangeTaxRateDialogProps) {
+export function ChangeTaxRateDialog({ rate, onClose }: ChangeTaxRateDialogProps) {
   const send = useChangeTaxRate();
   const client = useQueryClient();
   const { queryKey } = taxRatesQuery();
@@ -29,8 +28,8 @@ export function ChangeTaxRateDialog({ rate, open, onOpenChange }: ChangeTaxRateD
 
   return (
     <Dialog
-      open={open}
-      onOpenChange={onOpenChange}
+      open
+      onOpenChange={onClose}
       title={`${rate.name}, ${percentText(rate.percent, 4)}`}
       description="The rate itself stays, since invoices were made with it. If it changed, enter the new one and retire this one."
     >
@@ -43,7 +42,7 @@ export function ChangeTaxRateDialog({ rate, open, onOpenChange }: ChangeTaxRateD
           const known = client.getQueryData(queryKey)?.items.find(({ id }) => id === rate.id);
           const ifMatch = known?.version ?? rate.version;
           const saved = await send.mutateAsync({ params: { id: rate.id }, body, ifMatch });
-          onOpenChange(false);
+          onClose();
           say(saved.active ? `${saved.name} is saved.` : `${saved.name} is retired.`);
         }}
       >
