@@ -3,6 +3,7 @@ import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
 import { keyboardAlone } from '../support/hands.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import { photoOfSide, photoRule } from '../support/picture.ts';
 import { signInAs } from '../support/steps.ts';
 import { expectAccessible, visit, walk } from '../support/walk.ts';
 
@@ -102,6 +103,70 @@ walk('the most pieces of a side are looked for, and the search is stopped', asyn
   await page.getByText(/^Looking for more: \d+ so far$/).waitFor();
   await expectAccessible(page);
   await page.getByText('The most that could be found.').waitFor({ timeout: 120_000 });
+});
+
+walk('a photo lies true to scale under the drawing, and is there next time', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'maker');
+  const lotId = await drawnSideOf(page, /russet/);
+  const read = async () =>
+    (await (await page.request.get(`${hidewright.url}/api/lots/${lotId}/drawing`)).json()) as {
+      photo: { mmPerPixel: number; x: number } | null;
+    };
+  await visit(page, `${hidewright.url}/stockroom/lots/${lotId}`);
+  await page.getByRole('button', { name: 'Change the drawing' }).click();
+  await page.getByRole('button', { name: 'Photo', exact: true }).click();
+  const file = page.getByLabel('Photo of the side');
+  const drawing = { name: 'side.svg', mimeType: 'image/svg+xml', buffer: Buffer.from('<svg/>') };
+  await file.setInputFiles(drawing);
+  await page.getByText(/^Choose a photo as PNG, JPEG or WebP/).waitFor();
+  await expectAccessible(page);
+
+  const buffer = await photoOfSide(page);
+  await file.setInputFiles({ name: 'side.png', mimeType: 'image/png', buffer });
+  const photo = page.locator('svg image');
+  await photo.waitFor();
+  const canvas = page.getByRole('application');
+  await canvas.scrollIntoViewIfNeeded();
+  const box = await photo.boundingBox();
+  if (!box) throw new Error('The photo is not to be seen.');
+  const { from, to } = photoRule;
+  await page.mouse.move(box.x + box.width * from.x, box.y + box.height * from.y);
+  await page.mouse.down();
+  await page.mouse.move(box.x + box.width * to.x, box.y + box.height * to.y, { steps: 5 });
+  await page.mouse.up();
+  await page.getByLabel('Length of the line').fill('1000 mm');
+  await page.getByRole('button', { name: 'Set the scale' }).click();
+  await page.getByText('The photo is true to scale.').waitFor();
+  await expectAccessible(page);
+  await page.getByRole('button', { name: 'Save the drawing' }).click();
+  await page.getByRole('button', { name: 'Change the drawing' }).waitFor();
+  const kept = (await read()).photo;
+  // The rule is 200 pixels long.
+  expect(kept?.mmPerPixel).toBeCloseTo(5, 1);
+
+  // By keyboard alone: another length for a line of two ends, then the photo moved and dimmed.
+  await page.reload();
+  await keyboardAlone.press(page.getByRole('button', { name: 'Change the drawing' }));
+  await keyboardAlone.press(page.getByRole('button', { name: 'Photo', exact: true }));
+  await photo.waitFor();
+  await canvas.focus();
+  for (const key of ['Enter', ...Array<string>(10).fill('Shift+ArrowRight'), 'Enter'])
+    await page.keyboard.press(key);
+  await keyboardAlone.fill(page.getByLabel('Length of the line'), '1000 mm');
+  await keyboardAlone.press(page.getByRole('button', { name: 'Set the scale' }));
+  await page.getByText('The photo is true to scale.').waitFor();
+  await keyboardAlone.press(page.getByRole('button', { name: 'Move', exact: true }));
+  await canvas.focus();
+  await page.keyboard.press('Shift+ArrowLeft');
+  const strength = page.getByRole('slider', { name: 'Photo' });
+  await strength.focus();
+  await page.keyboard.press('Home');
+  expect(await strength.getAttribute('aria-valuetext')).toBe('hidden');
+  await keyboardAlone.press(page.getByRole('button', { name: 'Save the drawing' }));
+  await page.getByRole('button', { name: 'Change the drawing' }).waitFor();
+  const again = (await read()).photo;
+  // 500 mm by the arrow keys were said to be 1000.
+  expect(again?.mmPerPixel).toBeCloseTo(2 * (kept?.mmPerPixel ?? 0), 6);
 });
 
 walk('what a run is best cut from', async ({ page }) => {

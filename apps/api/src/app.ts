@@ -19,6 +19,7 @@ import { jobRoutes } from './modules/jobs/jobs.routes.ts';
 import { layoutRoutes } from './modules/layouts/layouts.routes.ts';
 import { leatherRoutes } from './modules/leathers/leathers.routes.ts';
 import { linkRoutes } from './modules/links/links.routes.ts';
+import { lotPhotoRoutes } from './modules/lots/lot-photos.routes.ts';
 import { lotSearchRoutes } from './modules/lots/lot-searches.routes.ts';
 import { lotRoutes } from './modules/lots/lots.routes.ts';
 import { orderRoutes } from './modules/orders/orders.routes.ts';
@@ -57,6 +58,7 @@ const rooms: ((context: Context) => Router)[] = [
   pressRoutes,
   jobRoutes,
   lotRoutes,
+  lotPhotoRoutes,
   lotSearchRoutes,
   hardwareRoutes,
   supplierRoutes,

@@ -25,6 +25,12 @@ export interface Endpoint<
   readonly query?: Query;
   readonly body?: Body;
   readonly reply: Reply;
+  /** The request's body is a file of one of these types, sent as it is; the sentences say what to send instead. */
+  readonly takes?: {
+    readonly types: readonly string[];
+    readonly mostBytes: number;
+    readonly refusal: { readonly type: string; readonly bytes: string };
+  };
   /** 201, and an `Idempotency-Key` is honoured. */
   readonly creates?: boolean;
   /** 202: the work goes on after the reply. Asking again joins it, so no key is needed. */

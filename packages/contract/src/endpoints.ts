@@ -9,6 +9,7 @@ import * as jobs from './jobs.ts';
 import * as layouts from './layouts.ts';
 import * as leathers from './leathers.ts';
 import * as links from './links.ts';
+import * as lotPhotos from './lot-photos.ts';
 import * as lotSearches from './lot-searches.ts';
 import * as lots from './lots.ts';
 import * as orders from './orders.ts';
@@ -49,6 +50,7 @@ const rooms: Record<string, unknown>[] = [
   benchHours,
   leathers,
   lots,
+  lotPhotos,
   lotSearches,
   hardware,
   suppliers,

@@ -14,6 +14,7 @@ export * from './layout-asked.ts';
 export * from './layouts.ts';
 export * from './leathers.ts';
 export * from './links.ts';
+export * from './lot-photos.ts';
 export * from './lot-searches.ts';
 export * from './lots.ts';
 export * from './orders.ts';

@@ -14,6 +14,7 @@ import {
   version,
 } from './fields.ts';
 import { lie } from './layouts.ts';
+import { photoPlace } from './lot-photos.ts';
 
 /** The forms that leather comes in and becomes. */
 export const lotForms = [
@@ -119,7 +120,7 @@ const drawing = {
 };
 
 const lotDrawing = z
-  .object({ ...drawing, usablePercent: z.string(), version })
+  .object({ ...drawing, usablePercent: z.string(), photo: photoPlace.nullable(), version })
   .meta({ id: 'LotDrawing' });
 export type LotDrawing = z.infer<typeof lotDrawing>;
 
@@ -139,25 +140,31 @@ export const drawLot = endpoint({
   access: ['owner', 'maker'],
   edits: true,
   params: idParams,
-  body: z.strictObject(drawing).superRefine((drawn, context) => {
-    if (context.issues.length > 0) return;
-    if (drawn.outline === null && drawn.flaws.length === 0) return;
-    if (drawn.outline === null) {
-      context.addIssue({
-        code: 'custom',
-        path: ['outline'],
-        message: 'Draw the edge before the flaws.',
-      });
-      return;
-    }
-    try {
-      soundSide({ outline: drawn.outline, flaws: drawn.flaws });
-    } catch (error) {
-      if (!(error instanceof DomainError)) throw error;
-      const path = error instanceof InvalidInput ? error.field.split('.') : [];
-      context.addIssue({ code: 'custom', path, message: error.message });
-    }
-  }),
+  body: z
+    .strictObject({
+      ...drawing,
+      /** Left out, it stays as it is; null takes it off. */
+      photo: photoPlace.nullable().optional(),
+    })
+    .superRefine((drawn, context) => {
+      if (context.issues.length > 0) return;
+      if (drawn.outline === null && drawn.flaws.length === 0) return;
+      if (drawn.outline === null) {
+        context.addIssue({
+          code: 'custom',
+          path: ['outline'],
+          message: 'Draw the edge before the flaws.',
+        });
+        return;
+      }
+      try {
+        soundSide({ outline: drawn.outline, flaws: drawn.flaws });
+      } catch (error) {
+        if (!(error instanceof DomainError)) throw error;
+        const path = error instanceof InvalidInput ? error.field.split('.') : [];
+        context.addIssue({ code: 'custom', path, message: error.message });
+      }
+    }),
   reply: lotDrawing,
 });
 

@@ -9,6 +9,8 @@ export interface Asked<E extends Endpoint> {
   params: ParamsOf<E>;
   query: QueryOf<E>;
   body: BodyOf<E>;
+  /** What was sent as it is; empty where the endpoint takes no file. */
+  bytes: Buffer;
   /** The version named by If-Match; 0 where the endpoint edits nothing. */
   ifMatch: number;
   /** The address under which the caller reached us, as it was said: good for the words of a link, never for a decision. */
@@ -21,6 +23,7 @@ export function readAsked<E extends Endpoint>(endpoint: E, request: Request): As
     params: read(endpoint.params, request.params, true) as ParamsOf<E>,
     query: read(endpoint.query, request.query, false) as QueryOf<E>,
     body: readBody(endpoint, request) as BodyOf<E>,
+    bytes: Buffer.isBuffer(request.body) ? request.body : Buffer.alloc(0),
     ifMatch: endpoint.edits === true ? readIfMatch(request.get('If-Match')) : 0,
     origin: `${request.protocol}://${request.get('Host') ?? 'localhost'}`,
   };

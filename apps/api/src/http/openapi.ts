@@ -32,6 +32,11 @@ function describe(endpoint: Endpoint): RouteConfig {
   if (endpoint.body !== undefined) {
     request.body = { required: true, content: { 'application/json': { schema: endpoint.body } } };
   }
+  if (endpoint.takes !== undefined) {
+    const bytes = { schema: { type: 'string', format: 'binary' } } as const;
+    const content = Object.fromEntries(endpoint.takes.types.map((type) => [type, bytes]));
+    request.body = { required: true, content };
+  }
   request.headers = z.object({
     ...(endpoint.edits === true ? { 'If-Match': z.string() } : {}),
     ...(endpoint.creates === true ? { 'Idempotency-Key': z.string().optional() } : {}),

@@ -11,6 +11,7 @@ import { inTransaction, reading, type Actor, type Work } from '../work.ts';
 import { readAsked, type Asked } from './asked.ts';
 import { once, readRequestKey } from './idempotency.ts';
 import { notYours, signInFirst } from './problem.ts';
+import { readBytes } from './read-bytes.ts';
 
 /** What an endpoint does; `prepared` is what its preparation, outside the transaction, brought. */
 type Run<E extends Endpoint, Prepared> = (
@@ -32,6 +33,7 @@ export function serve<E extends Endpoint, Prepared = undefined>(
   prepare?: (asked: Asked<E>, actor: Actor) => Promise<Prepared>,
 ): void {
   bind(router, endpoint, async (request, response) => {
+    if (endpoint.takes) await readBytes(endpoint.takes, request, response);
     const asked = readAsked(endpoint, request);
     const actor = actorOf(request);
     const prepared = (await prepare?.(asked, actor)) as Prepared;

@@ -2,6 +2,7 @@ import { TheHouse } from './migration-20261201-the-house.ts';
 import { ThePresses } from './migration-20261201-the-presses.ts';
 import { TheSides } from './migration-20261201-the-sides.ts';
 import { TheWorkings } from './migration-20261201-the-workings.ts';
+import { ThePhotos } from './migration-20261202-the-photos.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -9,4 +10,5 @@ export const migrations = [
   { name: 'migration-20261201-the-presses', class: ThePresses },
   { name: 'migration-20261201-the-sides', class: TheSides },
   { name: 'migration-20261201-the-workings', class: TheWorkings },
+  { name: 'migration-20261202-the-photos', class: ThePhotos },
 ];

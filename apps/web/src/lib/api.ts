@@ -16,6 +16,8 @@ type Given<Name extends string, Value> = [Value] extends [undefined]
 export type CallInput<E extends Endpoint> = Given<'params', ParamsOf<E>> &
   Given<'body', BodyInputOf<E>> & {
     query?: QueryInputOf<E> | undefined;
+    /** A file that is sent as it is, for an endpoint that takes one. */
+    bytes?: Blob | undefined;
     /** The version that was read, for an endpoint that edits. */
     ifMatch?: number | undefined;
     /** Given for a retry of the same submit; made afresh otherwise. */
@@ -27,6 +29,7 @@ type LooseInput = {
   params?: unknown | undefined;
   query?: unknown | undefined;
   body?: unknown | undefined;
+  bytes?: Blob | undefined;
   ifMatch?: number | undefined;
   idempotencyKey?: string | undefined;
   signal?: AbortSignal | undefined;
@@ -73,6 +76,7 @@ async function send(endpoint: Endpoint, given: LooseInput): Promise<Response> {
     credentials: 'same-origin',
   };
   if (given.body !== undefined) init.body = JSON.stringify(given.body);
+  if (given.bytes) init.body = given.bytes;
   if (given.signal) init.signal = given.signal;
   const address = addressOf(endpoint, { params: given.params, query: given.query });
   try {
@@ -86,6 +90,7 @@ async function send(endpoint: Endpoint, given: LooseInput): Promise<Response> {
 function headersFor(endpoint: Endpoint, given: LooseInput): Record<string, string> {
   const headers: Record<string, string> = { accept: 'application/json' };
   if (given.body !== undefined) headers['content-type'] = 'application/json';
+  if (given.bytes) headers['content-type'] = given.bytes.type;
   if (endpoint.creates) headers['idempotency-key'] = given.idempotencyKey ?? randomKey();
   if (given.ifMatch !== undefined) headers['if-match'] = `"${given.ifMatch}"`;
   return headers;

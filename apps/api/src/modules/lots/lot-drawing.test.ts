@@ -32,7 +32,7 @@ describe('the drawing of a side', () => {
     expect(blank).toMatchObject({ outline: null, flaws: [], usablePercent: '85' });
     const drawing = { outline: edge, flaws: [flaw], usablePercent: '80' };
     const drawn = await draw(drawing, blank.version).expect(200);
-    expect(drawn.body).toEqual({ ...drawing, version: blank.version + 1 });
+    expect(drawn.body).toEqual({ ...drawing, photo: null, version: blank.version + 1 });
     expect(await read()).toEqual(drawn.body);
     await draw(drawing, blank.version).expect(412);
   });

@@ -81,6 +81,14 @@ export class Lot {
   @Property({ type: PercentType, columnType: 'integer' })
   usablePercent: Decimal = new Decimal(85);
 
+  /** The photo under its drawing. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  photoHash: string | null = null;
+
+  /** Its top left corner in mm, and mm per pixel. */
+  @Property({ type: JsonText, columnType: 'text', nullable: true })
+  photoPlace: unknown = null;
+
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;
 }

@@ -16,12 +16,12 @@ import { keepLayout } from '../layouts/stored-layouts.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
-import { notFound } from '../../http/problem.ts';
 import { serve } from '../../http/serve.ts';
-import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
+import { findLot } from './find-lot.ts';
+import { photoOf, placePhoto } from './lot-photo.ts';
 import { requireFreeTag } from './lot-tags.ts';
-import { Lot } from './lot.entity.ts';
+import type { Lot } from './lot.entity.ts';
 import { readLotList, readOneLot } from './read-lots.ts';
 
 export function lotRoutes(context: Context): Router {
@@ -57,9 +57,10 @@ export function lotRoutes(context: Context): Router {
   serve(router, context, drawLot, async (work, { params, body, ifMatch }) => {
     const lot = await findLot(work.em, params.id);
     await requireVersion(work.em, { kind: 'lot', id: lot.id, version: lot.version }, ifMatch);
-    const { outline, flaws, usablePercent } = body;
+    const { outline, flaws, usablePercent, photo } = body;
     const sound = outline === null ? { outline, flaws: [] } : soundSide({ outline, flaws });
     assignDefined(lot, { ...sound, usablePercent: new Decimal(usablePercent) });
+    if (photo !== undefined) await placePhoto(work, lot, photo);
     await work.em.flush();
     await logDeed(work, {
       action: `drew lot ${lot.tag} with ${sound.flaws.length} flaws`,
@@ -83,16 +84,10 @@ export function lotRoutes(context: Context): Router {
   return router;
 }
 
-/** @throws {Problem} 404 */
-async function findLot(em: Work['em'], id: number): Promise<Lot> {
-  const lot = await em.findOne(Lot, id);
-  if (lot === null) throw notFound('lot');
-  return lot;
-}
-
 const drawingOf = (lot: Lot): LotDrawing => ({
   outline: lot.outline as LotDrawing['outline'],
   flaws: lot.flaws as LotDrawing['flaws'],
   usablePercent: lot.usablePercent.toString(),
+  photo: photoOf(lot),
   version: lot.version,
 });

@@ -1,4 +1,5 @@
 import {
+  addLotPhoto,
   changeLot,
   drawLot,
   layOnLot,
@@ -13,6 +14,9 @@ import { lotSearchQuery } from './lots.queries.ts';
 export const useChangeLot = () => useSend(changeLot);
 
 export const useDrawLot = () => useSend(drawLot);
+
+/** Nothing shows it until the drawing is saved. */
+export const useAddLotPhoto = () => useSend(addLotPhoto, { invalidates: [] });
 
 /** It changes nothing that is shown elsewhere. */
 export const useLayOnLot = () => useSend(layOnLot, { invalidates: [] });

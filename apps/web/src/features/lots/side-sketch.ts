@@ -60,3 +60,9 @@ export function boxOf(points: readonly Point[]): Box {
   const [x, y] = [Math.min(...xs), Math.min(...ys)];
   return { x, y, width: Math.max(...xs) - x, height: Math.max(...ys) - y };
 }
+
+/** As SVG takes it, with some room around. */
+export function viewBoxOf({ x, y, width, height }: Box): string {
+  const margin = Math.max(width, height) * 0.03;
+  return `${x - margin} ${y - margin} ${width + 2 * margin} ${height + 2 * margin}`;
+}

@@ -1,34 +1,31 @@
 import type { Point } from '@hidewright/domain';
 import { useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
 import { SidePaths } from '../../../components/side-paths.tsx';
-import { boxOf, type SideSketch } from '../side-sketch.ts';
+import { placeOn, strideOf, sumOf } from '../canvas-hand.ts';
+import { frameOf, type SidePhoto } from '../side-photo.ts';
+import { viewBoxOf, type SideSketch } from '../side-sketch.ts';
+import { Crosshair } from './crosshair.tsx';
+import { PhotoBackdrop } from './photo-backdrop.tsx';
 
 interface SideCanvasProps {
   sketch: SideSketch;
   /** Which part the hand works on. */
   works: 'flaws' | 'edge';
+  /** Under the drawing, while it is shown. */
+  photo: SidePhoto | undefined;
+  /** How strong it is, in per cent. */
+  strength: number;
   onCorner: (at: Point) => void;
   onClose: () => void;
   onDrop: () => void;
   onMoveCorner: (at: number, to: Point) => void;
 }
 
-const steps: Record<string, [number, number]> = {
-  ArrowLeft: [-1, 0],
-  ArrowRight: [1, 0],
-  ArrowUp: [0, -1],
-  ArrowDown: [0, 1],
-};
-
-/** How far an arrow key goes, in mm: with Shift held, and without. */
-const stride = (event: KeyboardEvent): number => (event.shiftKey ? 50 : 10);
-
 /** The side, to be drawn on: with mouse or finger around a flaw, or with a crosshair that the arrow keys move. */
 export function SideCanvas(props: SideCanvasProps) {
-  const { sketch, works, onCorner, onClose, onDrop } = props;
+  const { sketch, works, photo, strength, onCorner, onClose, onDrop } = props;
   const svg = useRef<SVGSVGElement>(null);
-  const box = boxOf(sketch.outline);
-  const margin = Math.max(box.width, box.height) * 0.03;
+  const box = frameOf(sketch.outline, photo);
   const [cross, setCross] = useState<Point>({
     x: Math.round(box.x + box.width / 2),
     y: Math.round(box.y + box.height / 2),
@@ -37,11 +34,9 @@ export function SideCanvas(props: SideCanvasProps) {
   const place = (event: PointerEvent): Point => placeOn(svg.current, event);
 
   function move(event: KeyboardEvent): void {
-    const step = steps[event.key];
-    if (step) {
-      const by = stride(event);
-      setCross(({ x, y }) => ({ x: x + step[0] * by, y: y + step[1] * by }));
-    } else if (event.key === 'Enter') onCorner(cross);
+    const step = strideOf(event);
+    if (step) setCross((at) => sumOf(at, step));
+    else if (event.key === 'Enter') onCorner(cross);
     else if (event.key === ' ') onClose();
     else if (event.key === 'Escape' && sketch.underWay.length > 0) onDrop();
     else return;
@@ -51,7 +46,7 @@ export function SideCanvas(props: SideCanvasProps) {
   return (
     <svg
       ref={svg}
-      viewBox={`${box.x - margin} ${box.y - margin} ${box.width + 2 * margin} ${box.height + 2 * margin}`}
+      viewBox={viewBoxOf(box)}
       className="block h-auto max-h-[32rem] w-full touch-none rounded bg-paper"
       role={works === 'flaws' ? 'application' : 'group'}
       aria-label={
@@ -74,7 +69,8 @@ export function SideCanvas(props: SideCanvasProps) {
         onClose();
       }}
     >
-      <SidePaths side={sketch} />
+      {photo && <PhotoBackdrop photo={photo} strength={strength} />}
+      <SidePaths side={sketch} seeThrough={photo !== undefined} />
       {sketch.underWay.length > 0 && (
         <path
           d={`M ${sketch.underWay.map(({ x, y }) => `${x} ${y}`).join(' L ')}`}
@@ -90,25 +86,6 @@ export function SideCanvas(props: SideCanvasProps) {
         <Corners {...props} size={box.width * 0.009} place={place} />
       )}
     </svg>
-  );
-}
-
-function placeOn(svg: SVGSVGElement | null, { clientX, clientY }: PointerEvent): Point {
-  const matrix = svg?.getScreenCTM();
-  if (!matrix) return { x: 0, y: 0 };
-  const { x, y } = new DOMPoint(clientX, clientY).matrixTransform(matrix.inverse());
-  return { x, y };
-}
-
-function Crosshair({ at: { x, y }, size }: { at: Point; size: number }) {
-  return (
-    <path
-      d={`M ${x - size} ${y} H ${x + size} M ${x} ${y - size} V ${y + size}`}
-      className="fill-none stroke-ink"
-      strokeWidth={1.5}
-      vectorEffect="non-scaling-stroke"
-      aria-hidden="true"
-    />
   );
 }
 
@@ -135,11 +112,10 @@ function Corners({ sketch, size, place, onMoveCorner }: CornersProps) {
         if (event.currentTarget.hasPointerCapture(event.pointerId)) onMoveCorner(at, place(event));
       }}
       onKeyDown={(event) => {
-        const step = steps[event.key];
+        const step = strideOf(event);
         if (!step) return;
         event.preventDefault();
-        const by = stride(event);
-        onMoveCorner(at, { x: corner.x + step[0] * by, y: corner.y + step[1] * by });
+        onMoveCorner(at, sumOf(corner, step));
       }}
     />
   ));
