@@ -76,6 +76,7 @@ export { withRejects } from './work/with-rejects.ts';
 export * from './work/flow-time.ts';
 export * from './work/ways-of-working.ts';
 export * from './work/learning.ts';
+export * from './work/time-study.ts';
 
 export * from './tooling/plate-choice.ts';
 
@@ -109,4 +110,11 @@ export * from './promise/late-jobs.ts';
 export * from './promise/two-machine.ts';
 
 export * from './compare/compare-run.ts';
+export * from './compare/bought-variances.ts';
+export * from './compare/time-variances.ts';
+export * from './learn/match-steps.ts';
+export * from './learn/pool-minutes.ts';
+export * from './learn/pool-shares.ts';
+export * from './learn/pool-step-time.ts';
+export * from './learn/unusual-runs.ts';
 export { compute, computeNames } from './compute/compute.ts';
