@@ -23,6 +23,7 @@ import { lotPhotoRoutes } from './modules/lots/lot-photos.routes.ts';
 import { lotSearchRoutes } from './modules/lots/lot-searches.routes.ts';
 import { lotRoutes } from './modules/lots/lots.routes.ts';
 import { orderRoutes } from './modules/orders/orders.routes.ts';
+import { learnedRoutes } from './modules/patterns/learned.routes.ts';
 import { patternRoutes } from './modules/patterns/patterns.routes.ts';
 import { peopleRoutes } from './modules/people/people.routes.ts';
 import { periodRoutes } from './modules/periods/periods.routes.ts';
@@ -33,6 +34,7 @@ import { searchRoutes } from './modules/search/search.routes.ts';
 import { stockRoutes } from './modules/stock/stock.routes.ts';
 import { supplierRoutes } from './modules/suppliers/suppliers.routes.ts';
 import { taxRateRoutes } from './modules/tax-rates/tax-rates.routes.ts';
+import { timeReadingRoutes } from './modules/time-readings/time-readings.routes.ts';
 import { todayRoutes } from './modules/today/today.routes.ts';
 import { toolRoutes } from './modules/tools/tools.routes.ts';
 import { workshopRoutes } from './modules/workshop/workshop.routes.ts';
@@ -53,6 +55,8 @@ const rooms: ((context: Context) => Router)[] = [
   linkRoutes,
   orderRoutes,
   patternRoutes,
+  learnedRoutes,
+  timeReadingRoutes,
   layoutRoutes,
   toolRoutes,
   pressRoutes,

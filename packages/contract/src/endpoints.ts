@@ -7,6 +7,7 @@ import * as hardware from './hardware.ts';
 import * as invoices from './invoices.ts';
 import * as jobs from './jobs.ts';
 import * as layouts from './layouts.ts';
+import * as learned from './learned.ts';
 import * as leathers from './leathers.ts';
 import * as links from './links.ts';
 import * as lotPhotos from './lot-photos.ts';
@@ -25,8 +26,10 @@ import * as stock from './stock.ts';
 import * as suppliers from './suppliers.ts';
 import * as system from './system.ts';
 import * as taxRates from './tax-rates.ts';
+import * as timeReadings from './time-readings.ts';
 import * as today from './today.ts';
 import * as tools from './tools.ts';
+import * as variances from './variances.ts';
 import * as workshop from './workshop.ts';
 
 const rooms: Record<string, unknown>[] = [
@@ -42,11 +45,14 @@ const rooms: Record<string, unknown>[] = [
   links,
   orders,
   patterns,
+  learned,
+  timeReadings,
   cutAdvice,
   layouts,
   tools,
   presses,
   jobs,
+  variances,
   benchHours,
   leathers,
   lots,

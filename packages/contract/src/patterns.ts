@@ -14,6 +14,7 @@ import {
   version,
 } from './fields.ts';
 import { layout, layoutFields, refineLayoutFields } from './layouts.ts';
+import { onceSound } from './once-sound.ts';
 import { workPlan } from './work-plan.ts';
 
 const perPiece = positiveCount.max(1000, 'Enter at most 1,000 for each piece.');
@@ -53,10 +54,13 @@ const patternOption = z.strictObject({
     .max(10, 'Keep it to 10 changes.'),
 });
 
-/** Good pieces out of those cut, in the shop's own runs. */
+/** Pieces that past runs counted; the cut count is reckoned with them. */
 const history = z
   .strictObject({ good: positiveCount, total: positiveCount })
-  .refine(({ good, total }) => good <= total, 'No more can be good than were cut.');
+  .refine(({ good, total }) => good <= total, {
+    path: ['good'],
+    ...onceSound('No more pieces can be good than were made.'),
+  });
 
 /** What a pattern is: its outline or hand count, leather, hardware and work. Each change is a new version. */
 export const patternDefinition = z
@@ -67,9 +71,10 @@ export const patternDefinition = z
     supplies: z.array(supplyLine).max(20, 'Keep it to 20 lines of supplies.').optional(),
     options: z.array(patternOption).max(6, 'Keep it to 6 options.').optional(),
     work: workPlan,
-    history: history.nullable().optional(),
     needsDie: z.boolean(),
     needsPlate: z.boolean(),
+    /** The pieces behind the rejects, where they were learned from past runs; null where they were entered. */
+    history: history.nullable().default(null),
   })
   .superRefine((definition, context) => {
     refineLayoutFields(definition, context);

@@ -32,6 +32,7 @@ import { StockBalance } from '../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
 import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { TaxRate } from '../modules/tax-rates/tax-rate.entity.ts';
+import { TimeReading } from '../modules/time-readings/time-reading.entity.ts';
 import { Impression } from '../modules/tools/impression.entity.ts';
 import { Tool } from '../modules/tools/tool.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
@@ -74,6 +75,7 @@ export const entities = [
   StoredLayout,
   Supplier,
   TaxRate,
+  TimeReading,
   Tool,
   WebSession,
   Workshop,

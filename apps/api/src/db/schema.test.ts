@@ -62,6 +62,7 @@ describe('the schema', () => {
     'bench_log',
     'pattern_version',
     'period',
+    'time_reading',
   ])('lets nobody change or delete a row of %s', async (table) => {
     const triggers = await query<{ name: string }>(
       `SELECT name FROM sqlite_master WHERE type = 'trigger' AND tbl_name = '${table}'`,

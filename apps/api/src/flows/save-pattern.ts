@@ -7,6 +7,7 @@ import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { keepLayout, type WorkedLayout } from '../modules/layouts/stored-layouts.ts';
 import { Leather } from '../modules/leathers/leather.entity.ts';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
+import { withHistoryOf } from '../modules/patterns/pattern-history.ts';
 import {
   definitionOf,
   findPattern,
@@ -66,8 +67,10 @@ export async function changePattern(
   if (asked.change.name !== undefined)
     await requireFreeName(work.em, Pattern, asked.change.name, pattern.id);
   if (asked.change.definition !== undefined) await requireParts(work, asked.change.definition);
-  const { name = pattern.name, active = pattern.active, definition } = asked.change;
-  const redesigned = definition !== undefined && (await isNew(work, pattern, definition));
+  const { name = pattern.name, active = pattern.active } = asked.change;
+  const before = definitionOf(await latestVersion(work, pattern));
+  const definition = asked.change.definition && withHistoryOf(before, asked.change.definition);
+  const redesigned = definition !== undefined && !sameDefinition(before, definition);
   if (!redesigned && name === pattern.name && active === pattern.active) return pattern;
   Object.assign(pattern, { name, active });
   if (redesigned) {
@@ -82,14 +85,6 @@ export async function changePattern(
   const detail = { changed: Object.keys(asked.change) };
   await logDeed(work, { action, subjectKind: 'pattern', subjectId: pattern.id, detail });
   return pattern;
-}
-
-async function isNew(
-  work: Work,
-  pattern: Pattern,
-  definition: PatternDefinition,
-): Promise<boolean> {
-  return !sameDefinition(definitionOf(await latestVersion(work, pattern)), definition);
 }
 
 async function addVersion(

@@ -18,6 +18,7 @@ export function coaster(
     work: { kind: 'minutesPer100', minutes: '180', rejectPercent: '10' },
     needsDie: true,
     needsPlate: true,
+    history: null,
     ...change,
   };
 }

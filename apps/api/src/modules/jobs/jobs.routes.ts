@@ -7,11 +7,13 @@ import {
   pauseJob as pauseJobEndpoint,
   readBenchHours,
   readJob,
+  readVariances,
   resumeJob as resumeJobEndpoint,
   takeForJob as takeForJobEndpoint,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { compareFinished } from '../../flows/compare-job.ts';
+import { explainJob } from '../../flows/explain-job.ts';
 import { finishJob } from '../../flows/finish-job.ts';
 import { logBench } from '../../flows/log-bench.ts';
 import { pauseJob, resumeJob } from '../../flows/pause-job.ts';
@@ -60,6 +62,8 @@ export function jobRoutes(context: Context): Router {
   });
 
   serve(router, context, compareJob, (work, { params }) => compareFinished(work, params.id));
+
+  serve(router, context, readVariances, (work, { params }) => explainJob(work, params.id));
 
   serve(router, context, readBenchHours, (work, { query }) => planBench(work, query.days));
 

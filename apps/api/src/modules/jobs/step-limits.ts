@@ -13,7 +13,9 @@ interface Counts {
 
 export const handledIn = (step: CountedStep): number => step.good + step.rejects + step.seconds;
 
-const countsPieces = (step: CountedStep): boolean => step.per === 'piece' || step.per === 'strike';
+/** Whether a step is counted in pieces, so that what fails there is a piece. */
+export const countsPieces = (step: Pick<CountedStep, 'per'>): boolean =>
+  step.per === 'piece' || step.per === 'strike';
 
 /**
  * How many of what each step is counted per can pass there, in order: the pieces that are cut less the rejects of

@@ -144,6 +144,7 @@ async function furnishPattern(
   const definition: PatternDefinition = {
     ...rest,
     work: rest.work.kind === 'steps' ? { ...rest.work, steps: [...rest.work.steps] } : rest.work,
+    history: null,
     leatherId: furnished.leathers.id(leather),
     hardware: parts.map(({ name, perPiece }) => ({
       hardwareId: furnished.hardware.id(name),

@@ -29,6 +29,7 @@ const tag: PatternDefinition = {
   },
   needsDie: true,
   needsPlate: false,
+  history: null,
 };
 
 describe('a pattern in its form', () => {

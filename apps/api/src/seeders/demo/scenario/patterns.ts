@@ -1,7 +1,7 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import type { HardwareName, LeatherName } from './stockroom.ts';
 
-type Named = Omit<PatternDefinition, 'leatherId' | 'hardware'> & {
+type Named = Omit<PatternDefinition, 'leatherId' | 'hardware' | 'history'> & {
   leather: LeatherName;
   hardware: { name: HardwareName; perPiece: number }[];
 };

@@ -1,0 +1,71 @@
+import { Decimal } from 'decimal.js';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { minutesPer100, unusualRuns, type Unusual } from '@hidewright/domain';
+import { Job } from '../../modules/jobs/job.entity.ts';
+import { JobStep } from '../../modules/jobs/job-step.entity.ts';
+import { piecesRun, piecesSpoiled } from '../../modules/jobs/step-limits.ts';
+import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts';
+import { usedBy, type Used } from '../used-by-job.ts';
+
+const mostRuns = 8;
+
+/** A finished job as the next estimate of its pattern looks at it. */
+export interface PastRun {
+  job: Job;
+  patternVersion: number;
+  steps: JobStep[];
+  used: Used;
+  /** Pieces that went under the press. */
+  cut: number;
+  /** Null where nobody counted at the bench. */
+  rejects: number | null;
+  minutesPer100: Decimal | null;
+  unusual: Unusual | null;
+}
+
+/** The last finished jobs of a pattern, newest first, whichever version they were made by. */
+export async function pastRuns(em: EntityManager, patternId: number): Promise<PastRun[]> {
+  const versions = await em.find(PatternVersion, { patternId }, { fields: ['id', 'number'] });
+  const numbers = new Map(versions.map(({ id, number }) => [id, number]));
+  const jobs = await em.find(
+    Job,
+    { patternVersionId: { $in: [...numbers.keys()] }, state: 'finished' },
+    { orderBy: { finishedAt: 'desc', id: 'desc' }, limit: mostRuns },
+  );
+  const steps = await em.find(
+    JobStep,
+    { jobId: { $in: jobs.map(({ id }) => id) } },
+    { orderBy: { position: 'asc' } },
+  );
+  const runs: Omit<PastRun, 'unusual'>[] = [];
+  for (const job of jobs) {
+    const own = steps.filter(({ jobId }) => jobId === job.id);
+    const patternVersion = numbers.get(job.patternVersionId) ?? 0;
+    runs.push({ ...runOf(job, own, await usedBy(em, job, own)), patternVersion });
+  }
+  return withUnusual(runs);
+}
+
+/** Where a step was not counted to its end, what came out and what was spoiled is what was cut. */
+function runOf(job: Job, steps: JobStep[], used: Used) {
+  const spoiled = piecesSpoiled(steps);
+  const counted = piecesRun(steps);
+  const cut = Math.max(counted, job.good + job.seconds + spoiled);
+  const minutes = used.minutes?.toString();
+  return {
+    ...{ job, steps, used, cut },
+    rejects: counted > 0 ? spoiled : null,
+    minutesPer100: minutes === undefined ? null : minutesPer100({ minutes, pieces: cut }),
+  };
+}
+
+function withUnusual(runs: Omit<PastRun, 'unusual'>[]): PastRun[] {
+  const unusual = unusualRuns(
+    runs.map((run) => ({
+      minutesPer100: run.minutesPer100?.toNumber() ?? null,
+      rejected: run.rejects,
+      reached: run.cut,
+    })),
+  );
+  return runs.map((run, at) => ({ ...run, unusual: unusual[at] ?? null }));
+}

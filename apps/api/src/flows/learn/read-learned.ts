@@ -1,0 +1,101 @@
+import type { Learned, PastRun as PastRunReply, PatternDefinition } from '@hidewright/contract';
+import { goodShare, poolMinutes, poolRejects, toAtMost } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import { dayIn } from '../../day-in.ts';
+import { countsPieces } from '../../modules/jobs/step-limits.ts';
+import {
+  definitionOf,
+  findPattern,
+  latestVersion,
+} from '../../modules/patterns/pattern-versions.ts';
+import { Workshop } from '../../modules/workshop/workshop.entity.ts';
+import type { Work } from '../../work.ts';
+import { learnMaterials } from './learned-materials.ts';
+import { learnSteps } from './learned-steps.ts';
+import { pastRuns, type PastRun } from './past-runs.ts';
+
+/**
+ * What the last finished runs of a pattern say its next estimate should be.
+ * @param without the jobs to leave out, by id
+ * @throws {Problem} 404
+ */
+export async function readLearned(
+  { em }: Pick<Work, 'em'>,
+  patternId: number,
+  without: readonly number[],
+): Promise<Learned> {
+  const pattern = await findPattern({ em }, patternId);
+  const definition = definitionOf(await latestVersion({ em }, pattern));
+  const { timeZone } = await em.findOneOrFail(Workshop, 1);
+  const runs = await pastRuns(em, patternId);
+  const mixed = runs.filter(({ job }) => !without.includes(job.id));
+  const { work } = definition;
+  const steps = work.kind === 'steps' ? learnSteps(work.steps, mixed) : [];
+  const rejects = {
+    said: toAtMost(new Decimal(1).minus(goodShare(work)).times(100), 2),
+    found: poolRejects(mixed.flatMap(countedRejects)),
+  };
+  return {
+    patternId,
+    patternName: pattern.name,
+    versionNumber: pattern.latestVersion,
+    by: work.kind,
+    runs: runs.map((run) => toReply(run, timeZone, !without.includes(run.job.id))),
+    minutes: {
+      said: work.kind === 'minutesPer100' ? work.minutes : null,
+      found: poolMinutes(mixed.flatMap(timed)),
+    },
+    rejects,
+    steps,
+    ...(await learnMaterials(em, definition, mixed)),
+    history: historyOf(definition, rejects.found, steps),
+    version: pattern.version,
+  };
+}
+
+const countedRejects = ({ rejects, cut }: PastRun) =>
+  rejects === null ? [] : [{ rejected: rejects, reached: cut }];
+
+const timed = ({ used, cut }: PastRun) =>
+  used.minutes === null ? [] : [{ minutes: used.minutes.toString(), pieces: cut }];
+
+/** The pieces stand behind all rejects or behind none: a step that nobody counted would pass for faultless. */
+function historyOf(
+  { work }: PatternDefinition,
+  found: Learned['rejects']['found'],
+  steps: Learned['steps'],
+): Learned['history'] {
+  const uncounted =
+    work.kind === 'steps'
+      ? steps
+          .filter((step) => countsPieces(step) && step.rejects === null)
+          .filter(({ said }) => Number(said.rejectPercent) > 0)
+          .map(({ name }) => name)
+      : [];
+  const good = found === null ? 0 : found.reached - found.rejected;
+  const kept = found !== null && good > 0 && uncounted.length === 0;
+  return { good: kept ? good : null, of: kept ? found.reached : null, uncounted };
+}
+
+function toReply(run: PastRun, timeZone: string, mixedIn: boolean): PastRunReply {
+  const { job, cut, rejects, used } = run;
+  const orNull = (value: Decimal | null, places: number) =>
+    value === null ? null : toAtMost(value, places);
+  const share = rejects === null ? null : new Decimal(rejects).times(100).div(cut);
+  const area = used.leatherAreaMm2;
+  return {
+    jobId: job.id,
+    number: job.number,
+    finishedOn: dayIn(timeZone, new Date(job.finishedAt ?? 0)),
+    patternVersion: run.patternVersion,
+    quantity: job.quantity,
+    ...{ cut, rejects, mixedIn },
+    good: job.good,
+    seconds: job.seconds,
+    minutes: orNull(used.minutes, 2),
+    minutesPer100: orNull(run.minutesPer100, 1),
+    rejectPercent: orNull(share, 2),
+    leatherPerGoodMm2: area === null ? null : toAtMost(new Decimal(area).div(job.good), 3),
+    unusual: run.unusual,
+  };
+}

@@ -1,0 +1,106 @@
+import { Decimal } from 'decimal.js';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { Job, JobComparison, JobVariances } from '@hidewright/contract';
+import { readyForTheBench, takenOn, ticketOf, type BenchShop } from '../../testing/bench-shop.ts';
+import { finishedRun } from '../../testing/finished-run.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let ready: BenchShop;
+
+beforeAll(async () => {
+  ready = await readyForTheBench(await startTestShop());
+});
+afterAll(() => ready.shop.close());
+
+const read = async <Reply>(job: Job, what: string, role: 'owner' | 'maker' = 'owner') =>
+  (await ready.shop.as(role).get(`/api/jobs/${job.id}/${what}`).expect(200)).body as Reply;
+
+const sumOf = (values: readonly (string | undefined)[]): string =>
+  values.reduce((sum, value) => sum.plus(value ?? 0), new Decimal(0)).toFixed(2);
+
+const logs = {
+  'Case panels': { good: 7, minutes: '15' },
+  Stamp: { good: 52, rejects: 4, minutes: '19' },
+  Cut: { good: 50, rejects: 2, minutes: '10' },
+  'Fold and rivet': { good: 50, minutes: '50' },
+};
+
+async function takenRun(): Promise<Job> {
+  const ticket = await ticketOf(ready, await takenOn(ready));
+  const post = (what: string, body: object) =>
+    ready.shop.as('maker').post(`/api/jobs/${ticket.id}/${what}`).send(body).expect(201);
+  await post('takings', { lotId: ready.lotId, areaMm2: ticket.neededAreaMm2 });
+  await post('takings', { hardwareId: ready.hardwareId, quantity: 120 });
+  for (const { id, name } of ticket.steps) {
+    await post('logs', { stepId: id, ...logs[name as keyof typeof logs] });
+  }
+  return (await post('finish', { good: 50 })).body as Job;
+}
+
+describe('why a run cost other than was said', () => {
+  let job: Job;
+  beforeAll(async () => {
+    job = await takenRun();
+  });
+
+  it('adds up to the differences of estimate and fact, to the cent', async () => {
+    const found = await read<JobVariances>(job, 'variances');
+    const { money } = await read<JobComparison>(job, 'comparison');
+    const difference = (what: string) => {
+      const row = money?.find((each) => each.what === what);
+      return new Decimal(row?.fact ?? 0).minus(row?.estimate ?? 0).toFixed(2);
+    };
+    const bought = (kind: string) => found.bought?.find((each) => each.kind === kind);
+    expect(bought('leather')?.sum).toBe(difference('Leather'));
+    expect(bought('hardware')?.sum).toBe(difference('Hardware'));
+    expect(found.wages?.sum).toBe(difference('Bench wages'));
+    const parts = [
+      ...found.steps.flatMap(({ money: each }) => [each?.time, each?.made, each?.wage]),
+      found.wages?.other,
+      ...(found.bought ?? []).flatMap(({ price, usage, made, other }) => [
+        ...[price, usage, made, other],
+      ]),
+    ];
+    expect(sumOf(parts)).toBe(found.sum);
+    expect(found.sum).toBe(sumOf(['Leather', 'Hardware', 'Bench wages'].map(difference)));
+  });
+
+  it('tells slow steps, wasted hardware and a dearer lot apart', async () => {
+    const { steps, bought } = await read<JobVariances>(job, 'variances');
+    // 56 strikes at 12 s and 5 minutes of setup are 16.2 minutes; 19 were logged, at 22 an hour.
+    expect(steps[1]).toMatchObject({
+      name: 'Stamp',
+      handled: 56,
+      saidForMade: '16.2',
+      wasMinutes: '19',
+      money: { time: '1.03', wage: '0.00' },
+    });
+    // 20 rivets at 0.17 beyond the 100 that 50 pieces take.
+    expect(bought?.find(({ kind }) => kind === 'hardware')).toMatchObject({
+      usage: '3.40',
+      price: '0.00',
+      made: '0.00',
+    });
+    expect(Number(bought?.[0]?.price)).toBeGreaterThan(0);
+  });
+
+  it('tells the maker minutes, and no money', async () => {
+    const found = await read<JobVariances>(job, 'variances', 'maker');
+    expect(Object.keys(found)).toEqual(['steps']);
+    expect(found.steps.map((step) => 'money' in step)).toEqual([false, false, false, false]);
+  });
+});
+
+describe('a run of which little was logged', () => {
+  it('has nothing to say of what was not', async () => {
+    const job = await finishedRun(ready, {});
+    const found = await read<JobVariances>(job, 'variances');
+    expect(found).toMatchObject({ wages: null, bought: [], sum: '0.00' });
+    expect(found.steps.every(({ wasMinutes }) => wasMinutes === null)).toBe(true);
+  });
+
+  it('waits until it is finished', async () => {
+    const { id } = await ticketOf(ready, await takenOn(ready, 50, { evenIfShort: true }));
+    await ready.shop.as('owner').get(`/api/jobs/${id}/variances`).expect(409);
+  });
+});
