@@ -103,6 +103,18 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner'],
   },
   {
+    name: 'learned',
+    list: '/patterns',
+    page: (id) => `/pattern-room/patterns/${id}/learned`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'time-step',
+    list: '/patterns',
+    page: (id) => `/pattern-room/patterns/${id}/time`,
+    roles: ['owner', 'maker'],
+  },
+  {
     name: 'pattern-change',
     list: '/patterns',
     page: (id) => `/pattern-room/patterns/${id}/change`,

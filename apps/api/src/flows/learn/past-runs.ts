@@ -1,4 +1,4 @@
-import { Decimal } from 'decimal.js';
+import type { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { minutesPer100, unusualRuns, type Unusual } from '@hidewright/domain';
 import { Job } from '../../modules/jobs/job.entity.ts';

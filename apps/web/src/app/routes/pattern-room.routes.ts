@@ -29,6 +29,16 @@ export const patternRoomRoutes: RouteObject[] = [
             lazy: () => import('./pattern-room/cut-from.tsx'),
           },
           {
+            path: ':id/learned',
+            handle: { crumb: nameOf },
+            lazy: () => import('./pattern-room/learned.tsx'),
+          },
+          {
+            path: ':id/time',
+            handle: { crumb: nameOf },
+            lazy: () => import('./pattern-room/time-step.tsx'),
+          },
+          {
             path: ':id/change',
             handle: { crumb: nameOf },
             lazy: () => import('./pattern-room/change-pattern.tsx'),

@@ -1,4 +1,4 @@
-import { compareJob, listJobs, readBenchHours, readJob } from '@hidewright/contract';
+import { compareJob, listJobs, readBenchHours, readJob, readVariances } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -29,6 +29,14 @@ export function comparisonQuery(id: number) {
   return queryOptions({
     queryKey: ['jobs', id, 'comparison'],
     queryFn: ({ signal }) => call(compareJob, { params: { id }, signal }),
+  });
+}
+
+/** Why a finished job took and cost other than was said. */
+export function variancesQuery(id: number) {
+  return queryOptions({
+    queryKey: ['jobs', id, 'variances'],
+    queryFn: ({ signal }) => call(readVariances, { params: { id }, signal }),
   });
 }
 

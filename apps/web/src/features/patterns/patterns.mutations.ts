@@ -2,14 +2,20 @@ import {
   addHardware,
   addLeather,
   addPattern,
+  addTimeReadings,
   adviseCut,
   changePattern,
+  takeLearned,
 } from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
 
 export const useAddPattern = () => useSend(addPattern);
 
 export const useChangePattern = () => useSend(changePattern);
+
+export const useTakeLearned = () => useSend(takeLearned);
+
+export const useAddTimeReadings = () => useSend(addTimeReadings);
 
 export const useAddLeather = () => useSend(addLeather);
 

@@ -61,6 +61,7 @@ const blankDefinition = {
   work: { kind: 'minutesPer100', minutes: '', rejectPercent: '', steps: [blankStep] },
   needsDie: true,
   needsPlate: false,
+  history: null,
 };
 
 /** A new pattern, with the shop's own starting values. */
@@ -114,6 +115,7 @@ function definitionBody(definition: Typed): Typed {
     work: chosen(definition['work'], 'kind', workMeasures),
     needsDie: definition['needsDie'],
     needsPlate: definition['needsPlate'],
+    history: definition['history'] ?? null,
   };
 }
 

@@ -14,9 +14,11 @@ import { StepList } from '../../../features/jobs/components/step-list.tsx';
 import { StockCard } from '../../../features/jobs/components/stock-card.tsx';
 import { TicketHead } from '../../../features/jobs/components/ticket-head.tsx';
 import { WaitingMark } from '../../../features/jobs/components/waiting-mark.tsx';
+import { WhyItDiffers } from '../../../features/jobs/components/why-it-differs.tsx';
 import { comparisonQuery, jobQuery } from '../../../features/jobs/jobs.queries.ts';
 import { useLogOutbox } from '../../../features/jobs/use-log-outbox.ts';
 import { ShipForm } from '../../../features/orders/components/ship-form.tsx';
+import { LearnedCard } from '../../../features/patterns/components/learned-card.tsx';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 
@@ -38,7 +40,12 @@ export function Component() {
       <StateNotice job={job} />
       <div className="mt-4 grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)] print:block">
         <div className="space-y-5 print:hidden">
-          {job.state === 'finished' && <Compared id={job.id} />}
+          {job.state === 'finished' && (
+            <>
+              <Compared id={job.id} />
+              <LearnedCard patternId={job.patternId} isOwner={session.person?.role === 'owner'} />
+            </>
+          )}
           <StepList
             job={job}
             waiting={outbox.waiting.filter(({ jobId }) => jobId === job.id)}
@@ -104,7 +111,12 @@ function StateNotice({ job }: { job: Job }) {
 
 function Compared({ id }: { id: number }) {
   const { data } = useQuery(comparisonQuery(id));
-  return data ? <EstimateAndFact comparison={data} /> : null;
+  if (!data) return null;
+  return (
+    <EstimateAndFact comparison={data}>
+      <WhyItDiffers jobId={id} />
+    </EstimateAndFact>
+  );
 }
 
 export const ErrorBoundary = RouteError;

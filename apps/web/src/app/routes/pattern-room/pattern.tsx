@@ -8,6 +8,7 @@ import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { LayoutLink } from '../../../features/patterns/components/layout-link.tsx';
+import { LearnedCard } from '../../../features/patterns/components/learned-card.tsx';
 import { PutAwayButton } from '../../../features/patterns/components/put-away-button.tsx';
 import { TemplateLinks } from '../../../features/patterns/components/template-links.tsx';
 import { VersionsList } from '../../../features/patterns/components/versions-list.tsx';
@@ -63,7 +64,11 @@ export function Component() {
               </>
             )}
             <WhatItTakes pattern={pattern} />
+            <p className="mt-3">
+              <TextLink to={`/pattern-room/patterns/${id}/time`}>Time a step</TextLink>
+            </p>
           </Card>
+          <LearnedCard patternId={id} isOwner={isOwner} />
           <Tooling pattern={pattern} isOwner={isOwner} />
           <PressCard pattern={pattern} />
           <Card title="Versions" subtitle="Quotes keep the version they were made with.">

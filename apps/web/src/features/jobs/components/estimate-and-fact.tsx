@@ -1,5 +1,6 @@
 import type { Compared, JobComparison } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
+import type { ReactNode } from 'react';
 import { Card } from '../../../components/card.tsx';
 import {
   areaText,
@@ -12,7 +13,13 @@ import type { AreaUnit } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 /** What was thought beforehand and what it was, side by side. */
-export function EstimateAndFact({ comparison }: { comparison: JobComparison }) {
+export function EstimateAndFact({
+  comparison,
+  children,
+}: {
+  comparison: JobComparison;
+  children?: ReactNode | undefined;
+}) {
   const { currency } = useWorkshop();
   return (
     <Card title="Estimate and fact">
@@ -23,6 +30,7 @@ export function EstimateAndFact({ comparison }: { comparison: JobComparison }) {
           <ComparedTable label="Money" rows={comparison.money} />
         </>
       )}
+      {children}
     </Card>
   );
 }

@@ -1,5 +1,8 @@
+import type { PatternDefinition } from '@hidewright/contract';
+import { useWatch } from 'react-hook-form';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
+import { countText } from '../../../lib/formatting.ts';
 import { useFreshErrors } from '../use-fresh-errors.ts';
 import { FieldRow } from './field-row.tsx';
 import { StepFields } from './step-fields.tsx';
@@ -12,11 +15,15 @@ const ways = [
 /** How long it takes, and how many fail: one figure to begin with, or step by step. */
 export function WorkFields() {
   const inSteps = useFreshErrors('definition.work', 'kind') === 'steps';
+  const behind = useBehindRejects();
   return (
     <>
       <RadioCards name="definition.work.kind" label="Work" cards={ways} across />
       {inSteps ? (
-        <StepFields />
+        <>
+          <StepFields />
+          {behind && <p className="text-sm text-ink-soft">Rejects {behind}</p>}
+        </>
       ) : (
         <FieldRow>
           <DecimalField
@@ -29,10 +36,18 @@ export function WorkFields() {
             name="definition.work.rejectPercent"
             label="Rejects"
             unit="%"
-            help="until your own runs say otherwise"
+            help={behind ?? 'until your own runs say otherwise'}
           />
         </FieldRow>
       )}
     </>
   );
+}
+
+/** The pieces of past runs behind the rejects, which rejects by hand do without. */
+function useBehindRejects(): string | undefined {
+  const history = useWatch({ name: 'definition.history' }) as PatternDefinition['history'];
+  if (!history) return undefined;
+  const pieces = `${countText(history.good)} good of ${countText(history.total)}`;
+  return `from your own runs, ${pieces}; rejects by hand leave those pieces out of the cut count`;
 }

@@ -1,0 +1,102 @@
+import type { Learned, LearnedStep, PastRun } from '@hidewright/contract';
+import { countText, numberText, percentText } from '../../lib/formatting.ts';
+
+/** A figure that can be taken into the pattern. */
+export interface Offered {
+  what: 'minutes' | 'rejects';
+  step: number | null;
+  /** "Stamp, time" */
+  name: string;
+  now: string;
+  found: string;
+  /** The spread and what stands behind it. */
+  behind: string;
+  changes: boolean;
+}
+
+/** What the runs offer to the pattern, in the order of its work; what no run logged is not among it. */
+export function offeredBy(learned: Learned): Offered[] {
+  if (learned.by === 'steps') return learned.steps.flatMap(offeredByStep);
+  const { minutes, rejects } = learned;
+  return [
+    ...(minutes.found === null
+      ? []
+      : [
+          {
+            ...{ what: 'minutes' as const, step: null, name: 'Minutes per 100' },
+            now: `${numberText(minutes.said ?? '0', 2)} min`,
+            found: `${numberText(minutes.found.per100, 2)} min`,
+            behind: minutesBehind(minutes.found),
+            changes: minutes.found.per100 !== minutes.said,
+          },
+        ]),
+    ...(rejects.found === null
+      ? []
+      : [{ ...rejectsOffered(rejects.said, rejects.found), step: null, name: 'Rejects' }]),
+  ];
+}
+
+function offeredByStep({ position: step, name, per, said, time, rejects }: LearnedStep): Offered[] {
+  const timeWords = (figures: { setupMinutes: string; secondsPerUnit: string }) =>
+    `${numberText(figures.secondsPerUnit, 2)} s per ${per}, setup ${numberText(figures.setupMinutes, 1)} min`;
+  const sameTime =
+    time?.secondsPerUnit === said.secondsPerUnit && time.setupMinutes === said.setupMinutes;
+  return [
+    ...(time === null
+      ? []
+      : [
+          {
+            ...{ what: 'minutes' as const, step, name: `${name}: time` },
+            now: timeWords(said),
+            found: timeWords(time),
+            behind: `${countText(time.units)} ${unitWord(per, time.units)} in ${runsWord(time.runs)}`,
+            changes: !sameTime,
+          },
+        ]),
+    ...(rejects === null
+      ? []
+      : [{ ...rejectsOffered(said.rejectPercent, rejects), step, name: `${name}: rejects` }]),
+  ];
+}
+
+type Found = NonNullable<Learned['rejects']['found']>;
+
+function rejectsOffered(said: string, found: Found) {
+  return {
+    what: 'rejects' as const,
+    now: percentText(said, 2),
+    found: percentText(found.percent, 2),
+    behind: rejectsBehind(found),
+    changes: Number(found.percent) !== Number(said),
+  };
+}
+
+/** "11 of 112; likely 5.6 to 16.7 %" */
+export function rejectsBehind({ rejected, reached, lowPercent, highPercent }: Found): string {
+  return `${countText(rejected)} of ${countText(reached)}; likely ${numberText(lowPercent, 1)} to ${percentText(highPercent)}`;
+}
+
+/** "112 pieces in 2 runs, give or take 13.9 min" */
+export function minutesBehind({
+  sd,
+  pieces,
+  runs,
+}: NonNullable<Learned['minutes']['found']>): string {
+  const spread = sd === null ? '' : `, give or take ${numberText(sd, 1)} min`;
+  return `${countText(pieces)} pieces in ${runsWord(runs)}${spread}`;
+}
+
+export const runsWord = (runs: number): string => (runs === 1 ? '1 run' : `${runs} runs`);
+
+const unitWord = (per: string, units: number): string => (units === 1 ? per : `${per}s`);
+
+/** The steps that keep their values, since no run logged them. */
+export function notLogged(learned: Learned): string[] {
+  return learned.steps.filter(({ time }) => time === null).map(({ name }) => name);
+}
+
+export const unusualWords: Record<NonNullable<PastRun['unusual']>, string> = {
+  slow: 'looks unusual: slow',
+  quick: 'looks unusual: quick',
+  'many rejects': 'looks unusual: many rejects',
+};

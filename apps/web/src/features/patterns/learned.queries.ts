@@ -1,0 +1,20 @@
+import { listTimeReadings, readLearned } from '@hidewright/contract';
+import { queryOptions } from '@tanstack/react-query';
+import { call } from '../../lib/api.ts';
+
+/** What the last runs of a pattern say, some of them left out. */
+export function learnedQuery(id: number, left: readonly number[] = []) {
+  const without = left.length === 0 ? undefined : left.join(',');
+  return queryOptions({
+    queryKey: ['patterns', id, 'learned', without],
+    queryFn: ({ signal }) => call(readLearned, { params: { id }, query: { without }, signal }),
+  });
+}
+
+/** Readings of a pattern's steps, and what its tickets say. */
+export function timeReadingsQuery(id: number) {
+  return queryOptions({
+    queryKey: ['patterns', id, 'time-readings'],
+    queryFn: ({ signal }) => call(listTimeReadings, { params: { id }, signal }),
+  });
+}
