@@ -3,7 +3,12 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { minutesPer100, unusualRuns, type Unusual } from '@hidewright/domain';
 import { Job } from '../../modules/jobs/job.entity.ts';
 import { JobStep } from '../../modules/jobs/job-step.entity.ts';
-import { piecesRun, piecesSpoiled } from '../../modules/jobs/step-limits.ts';
+import {
+  countsPieces,
+  handledIn,
+  piecesRun,
+  piecesSpoiled,
+} from '../../modules/jobs/step-limits.ts';
 import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts';
 import { usedBy, type Used } from '../used-by-job.ts';
 
@@ -17,7 +22,7 @@ export interface PastRun {
   used: Used;
   /** Pieces that went under the press. */
   cut: number;
-  /** Null where nobody counted at the bench. */
+  /** Null where nobody counted at the bench, or pieces went missing where nobody did. */
   rejects: number | null;
   minutesPer100: Decimal | null;
   unusual: Unusual | null;
@@ -49,14 +54,21 @@ export async function pastRuns(em: EntityManager, patternId: number): Promise<Pa
 /** Where a step was not counted to its end, what came out and what was spoiled is what was cut. */
 function runOf(job: Job, steps: JobStep[], used: Used) {
   const spoiled = piecesSpoiled(steps);
-  const counted = piecesRun(steps);
-  const cut = Math.max(counted, job.good + job.seconds + spoiled);
+  const cut = Math.max(piecesRun(steps), job.good + job.seconds + spoiled);
   const minutes = used.minutes?.toString();
   return {
     ...{ job, steps, used, cut },
-    rejects: counted > 0 ? spoiled : null,
+    rejects: allAccountedFor(job, steps, spoiled) ? spoiled : null,
     minutesPer100: minutes === undefined ? null : minutesPer100({ minutes, pieces: cut }),
   };
+}
+
+/** Pieces that went missing at a step that nobody counted may be rejects or overs: then the rejects are not known. */
+function allAccountedFor(job: Job, steps: readonly JobStep[], spoiled: number): boolean {
+  const counted = piecesRun(steps);
+  if (counted === 0) return false;
+  const everyStep = steps.filter(countsPieces).every((step) => handledIn(step) > 0);
+  return everyStep || job.good + job.seconds + spoiled >= counted;
 }
 
 function withUnusual(runs: Omit<PastRun, 'unusual'>[]): PastRun[] {

@@ -88,6 +88,23 @@ describe('what the last runs of a pattern say', () => {
   });
 });
 
+describe('a run that was counted in part', () => {
+  it('says nothing of rejects where pieces are missing, and all where none are', async () => {
+    const partly = await readyForTheBench(await startTestShop());
+    const stamped = { Stamp: { good: 52, rejects: 4 } };
+    await finishedRun(partly, stamped, { good: 50 });
+    await finishedRun(partly, stamped, { good: 51, seconds: 1 });
+    await finishedRun(partly, {});
+    const reply = await partly.shop.as('owner').get(`/api/patterns/${partly.patternId}/learned`);
+    const { runs, rejects, minutes, history } = reply.body as Learned;
+    expect(runs.map((run) => run.rejects)).toEqual([null, 4, null]);
+    expect(rejects.found).toMatchObject({ rejected: 4, reached: 56 });
+    expect(minutes.found).toBeNull();
+    expect(history).toEqual({ good: null, of: null, uncounted: ['Cut', 'Fold and rivet'] });
+    await partly.shop.close();
+  });
+});
+
 describe('using it', () => {
   it('one by one leaves the rest as it was, with no pieces behind part of the rejects', async () => {
     const before = await pattern();
@@ -138,6 +155,17 @@ describe('using it', () => {
     expect(byHand.definition.history).toBeNull();
   });
 
+  it('takes no more good pieces than there were, and none where nothing is said of them', async () => {
+    const { definition, version } = await pattern();
+    const { history, ...unsaid } = definition;
+    const send = (sent: object) =>
+      as('owner').patch(at()).set('If-Match', `"${version}"`).send({ definition: sent });
+    const reply = await send({ ...unsaid, history: { good: 9, total: 8 } }).expect(422);
+    expect(reply.body.errors[0].field).toBe('definition.history.good');
+    expect((await send(unsaid).expect(200)).body.definition.history).toBeNull();
+    expect(history).toBeNull();
+  });
+
   it('needs the version that was read, and figures of this way of working', async () => {
     const body = { take: [{ what: 'minutes', step: 2 }] };
     await as('owner').post(`${at()}/learned`).send(body).expect(428);
@@ -145,5 +173,20 @@ describe('using it', () => {
     expect((await take({ take: [{ what: 'minutes', step: null }] })).status).toBe(422);
     expect((await take({ take: [{ what: 'minutes', step: 9 }] })).status).toBe(422);
     expect((await take({ take: [] })).status).toBe(422);
+  });
+
+  it('is one figure of each where the pattern has one, also of runs that went step by step', async () => {
+    const { definition, version } = await pattern();
+    const work = { kind: 'minutesPer100', minutes: '180', rejectPercent: '10' };
+    const send = as('owner').patch(at()).set('If-Match', `"${version}"`);
+    await send.send({ definition: { ...definition, work } }).expect(200);
+    const found = await learned();
+    expect(found).toMatchObject({ by: 'minutesPer100', steps: [], minutes: { said: '180' } });
+    const take2 = ['minutes', 'rejects'].map((what) => ({ what, step: null }));
+    expect((await take({ take: take2, without: [jobs[0]?.id] })).status).toBe(200);
+    expect((await pattern()).definition).toMatchObject({
+      work: { minutes: '148.21', rejectPercent: '8.93' },
+      history: { good: 51, total: 56 },
+    });
   });
 });

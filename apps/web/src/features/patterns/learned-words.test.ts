@@ -18,9 +18,9 @@ describe('what the runs offer', () => {
     expect(offeredBy({ by: 'steps', steps } as Learned)).toEqual([
       {
         ...{ what: 'minutes', step: 1, name: 'Stamp: time', changes: true },
-        now: '12 s per strike, setup 5 min',
-        found: '14.5 s per strike, setup 5 min',
-        behind: '200 strikes in 3 runs',
+        now: '12 s',
+        found: '14.5 s per strike',
+        behind: '200 strikes in 3 runs, setup stays at 5 min',
       },
       {
         ...{ what: 'rejects', step: 1, name: 'Stamp: rejects', changes: false },

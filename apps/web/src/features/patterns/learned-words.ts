@@ -1,5 +1,5 @@
 import type { Learned, LearnedStep, PastRun } from '@hidewright/contract';
-import { countText, numberText, percentText } from '../../lib/formatting.ts';
+import { countText, minutesText, numberText, percentText } from '../../lib/formatting.ts';
 
 /** A figure that can be taken into the pattern. */
 export interface Offered {
@@ -37,26 +37,30 @@ export function offeredBy(learned: Learned): Offered[] {
 }
 
 function offeredByStep({ position: step, name, per, said, time, rejects }: LearnedStep): Offered[] {
-  const timeWords = (figures: { setupMinutes: string; secondsPerUnit: string }) =>
-    `${numberText(figures.secondsPerUnit, 2)} s per ${per}, setup ${numberText(figures.setupMinutes, 1)} min`;
-  const sameTime =
-    time?.secondsPerUnit === said.secondsPerUnit && time.setupMinutes === said.setupMinutes;
   return [
-    ...(time === null
-      ? []
-      : [
-          {
-            ...{ what: 'minutes' as const, step, name: `${name}: time` },
-            now: timeWords(said),
-            found: timeWords(time),
-            behind: `${countText(time.units)} ${unitWord(per, time.units)} in ${runsWord(time.runs)}`,
-            changes: !sameTime,
-          },
-        ]),
+    ...(time === null ? [] : [{ ...timeOffered(said, time, per), step, name: `${name}: time` }]),
     ...(rejects === null
       ? []
       : [{ ...rejectsOffered(said.rejectPercent, rejects), step, name: `${name}: rejects` }]),
   ];
+}
+
+/** The setup is said only where it changes too. */
+function timeOffered(
+  said: LearnedStep['said'],
+  time: NonNullable<LearnedStep['time']>,
+  per: LearnedStep['per'],
+) {
+  const sameSetup = Number(time.setupMinutes) === Number(said.setupMinutes);
+  const words = ({ setupMinutes, secondsPerUnit }: typeof said | typeof time) =>
+    `${numberText(secondsPerUnit, 2)} s${sameSetup ? '' : `, setup ${minutesText(setupMinutes)}`}`;
+  return {
+    what: 'minutes' as const,
+    now: words(said),
+    found: sameSetup ? `${words(time)} per ${per}` : words(time),
+    behind: `${countText(time.units)} ${unitWord(per, time.units)} in ${runsWord(time.runs)}${sameSetup ? `, setup stays at ${minutesText(said.setupMinutes)}` : ''}`,
+    changes: !sameSetup || Number(time.secondsPerUnit) !== Number(said.secondsPerUnit),
+  };
 }
 
 type Found = NonNullable<Learned['rejects']['found']>;

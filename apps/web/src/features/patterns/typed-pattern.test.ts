@@ -38,6 +38,12 @@ describe('a pattern in its form', () => {
     expect(patternBody(typedPattern(pattern))).toEqual(pattern);
   });
 
+  it('is sent with the pieces of past runs behind its rejects', () => {
+    const history = { good: 470, total: 500 };
+    const pattern = { name: 'Luggage tag', definition: { ...tag, history } };
+    expect(patternBody(typedPattern(pattern))).toEqual(pattern);
+  });
+
   it('is sent with a hand count beside its drawing, and without the panel that would not hold', () => {
     const handCount = { pieces: 21, widthMm: '279.4', heightMm: '330.2' };
     const definition = { ...tag, layoutBy: 'hand count' as const, handCount, container: null };
