@@ -1,4 +1,5 @@
 import type { Crystal } from './crystal.ts';
+import { mostAtOnce } from './most-at-once.ts';
 import type { Ring, NestPlacement } from './problem.ts';
 
 /** How a pattern lies over a room: its origin as shares of its steps, and what it then gives. */
@@ -150,25 +151,6 @@ function linesThroughSmall(edges: Edges): number[] {
 
 /** In shares of a step: within what the room is drawn larger by. */
 const nudge = 1e-9;
-
-/** After each start one more, past each end one fewer: where is the most, from 0 to 1. */
-function mostAtOnce(starts: Float64Array, ends: Float64Array): { gain: number; u: number } {
-  let [gain, best, u] = [0, 0, Math.min(1, ends[0] ?? 1, starts[0] ?? 1) / 2];
-  let passed = 0;
-  for (let at = 0; at < starts.length; at += 1) {
-    const start = starts[at] as number;
-    while (passed < ends.length && (ends[passed] as number) < start) {
-      passed += 1;
-      gain -= 1;
-    }
-    gain += 1;
-    if (gain > best) {
-      best = gain;
-      u = (start + Math.max(start, Math.min(ends[passed] ?? 1, starts[at + 1] ?? 1))) / 2;
-    }
-  }
-  return { gain: best, u };
-}
 
 function edgesOf({ along, across }: Crystal, rings: readonly Ring[], x: number, y: number): Edges {
   const cross = along.x * across.y - along.y * across.x;

@@ -6,12 +6,11 @@ import { Surroundings } from './layout-state.ts';
 import { nestFaults } from './nest-faults.ts';
 import { panelCandidates } from './plan-panel.ts';
 import { sideCandidates } from './plan-side.ts';
-import { bestStripCell, repeated } from './plan-strip.ts';
+import { bestStripCell, repeated, stripRows } from './plan-strip.ts';
 import type { NestProblem, RegularPlan, RowNumbers } from './problem.ts';
 import { Room } from './room.ts';
 import { mixNumbers, rowMixes, turnsToMix } from './row-mixes.ts';
 import { basesOf, type Shape, shapeOf } from './shape.ts';
-import type { StripCell } from './strip-cell.ts';
 
 const nothing: RegularPlan = {
   placements: [],
@@ -106,17 +105,6 @@ function planStrip(problem: NestProblem, shape: Shape, patterns: readonly Patter
 
 const densityOf = ({ areaMm2 }: Shape, patterns: readonly Pattern[]): number =>
   patterns[0] ? areaMm2 / patterns[0].areaMm2 : 0;
-
-function stripRows({ periodMm, pieces }: StripCell): RowNumbers {
-  const [first, second] = pieces;
-  return {
-    pitchMm: periodMm,
-    rowStepMm: first && second ? Math.abs(second.y - first.y) : 0,
-    shiftMm: first && second ? second.x - first.x : 0,
-    directionDeg: 0,
-    rowTurns: pieces.map(({ rot }) => rot),
-  };
-}
 
 function rowNumbers({ along, across, members }: Crystal, rot: number): RowNumbers {
   const pitchMm = Math.hypot(along.x, along.y);

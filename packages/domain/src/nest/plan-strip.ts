@@ -1,7 +1,7 @@
 import { fullTurn } from './candidates.ts';
 import type { Pattern } from './dense-patterns.ts';
 import { nestFaults } from './nest-faults.ts';
-import type { NestPlacement, NestProblem } from './problem.ts';
+import type { NestPlacement, NestProblem, RowNumbers } from './problem.ts';
 import { ringBounds, turned } from './ring.ts';
 import { rowFrame } from './row-frame.ts';
 import { type Base, basesOf, type Shape } from './shape.ts';
@@ -25,16 +25,25 @@ export function bestStripCell(
   patterns: readonly Pattern[],
 ): StripCell | null {
   const bases = basesOf(problem.rotations, shape.symmetrical) ?? freeBases(patterns, shape);
-  const seeds = bases.flatMap((base) => {
-    const rules = rulesFor(problem, shape, base);
-    return rules ? seedsFor(shape, base, rules).map((cell) => ({ cell, rules })) : [];
-  });
+  const seeds = stripSeeds(problem, shape, bases);
   seeds.sort((a, b) => perPiece(a.cell) - perPiece(b.cell));
   const shorter = distinct(seeds).map(({ cell, rules }) => shortened(cell, rules));
   const best = Math.min(Infinity, ...shorter.map(perPiece));
   const cells = [...shorter, ...squeezedCells(seeds, best), ...seeds.map(({ cell }) => cell)];
   cells.sort((a, b) => perPiece(a) - perPiece(b));
   return cells.find((cell) => isSound(problem, cell)) ?? null;
+}
+
+/** Rows along and across a strip, of pieces that lie in one of the ways given. */
+export function stripSeeds(
+  problem: NestProblem,
+  shape: Shape,
+  bases: readonly Base[],
+): StripSeed[] {
+  return bases.flatMap((base) => {
+    const rules = rulesFor(problem, shape, base);
+    return rules ? seedsFor(shape, base, rules).map((cell) => ({ cell, rules })) : [];
+  });
 }
 
 function rulesFor(problem: NestProblem, shape: Shape, { rot, halfTurns }: Base): StripRules | null {
@@ -113,4 +122,16 @@ function startingAtEnd(
   });
   const best = shortest.reduce((a, b) => (b.reach < a.reach ? b : a));
   return best.moved.sort((a, b) => a.x - b.x || a.y - b.y);
+}
+
+/** The numbers of a strip's rows, of which the first piece begins the repeat. */
+export function stripRows({ periodMm, pieces }: StripCell): RowNumbers {
+  const [first, second] = pieces;
+  return {
+    pitchMm: periodMm,
+    rowStepMm: first && second ? Math.abs(second.y - first.y) : 0,
+    shiftMm: first && second ? second.x - first.x : 0,
+    directionDeg: 0,
+    rowTurns: pieces.map(({ rot }) => rot),
+  };
 }

@@ -16,6 +16,8 @@ export function checkLayoutInput(input: LayoutInput): void {
 /** The same for a side, which comes back in whole micrometres. @throws InvalidInput */
 export function checkSideInput(input: SideInput): DrawnSide {
   checkRules(input);
+  const { widestMm } = input;
+  if (widestMm !== undefined) checkSide(widestMm, 'widestMm', 'widest strip', 1, 20_000);
   return soundSide(input.side);
 }
 

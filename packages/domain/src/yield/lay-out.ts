@@ -1,9 +1,11 @@
 import { planRegular } from '../nest/plan-regular.ts';
+import { planSideStrips } from '../nest/side-strips.ts';
 import { checkLayoutInput, checkSideInput } from './check-layout-input.ts';
 import type { Layout, LayoutInput, SideInput, SideLayout } from './layout.ts';
 import { layIn, lieOf, type Watch } from './lie.ts';
 import { containerProblem, sideProblem, stripProblem } from './nest-problem.ts';
 import { areaOfContainer, areaOfSide } from './shares.ts';
+import { sideCuts } from './side-cuts.ts';
 
 /**
  * Lays copies of an outline on a panel or a strip: in rows that a person repeats by hand, or as the
@@ -35,11 +37,21 @@ export function layOut(input: LayoutInput, watch: Watch = {}): Layout {
 const tidy = (value: number): number => Math.round(value * 1e4) / 1e4;
 
 /**
- * The same on a side or hide as it was drawn, clear of its edge and its flaws.
+ * The same on a side or hide as it was drawn, clear of its edge and its flaws; in rows within strips
+ * that it is cut into first, where the input says how wide they may be.
  * @throws InvalidInput · NotWorkable beyond 20,000 pieces
  */
 export function layOutSide(input: SideInput, watch: Watch = {}): SideLayout {
   const side = checkSideInput(input);
   const sound = { ...input, side };
-  return { ...layIn(input, areaOfSide(side), sideProblem(sound), watch), side };
+  const [area, problem] = [areaOfSide(side), sideProblem(sound)];
+  const { widestMm } = input;
+  if (widestMm === undefined) return { ...layIn(input, area, problem, watch), side, cuts: null };
+  const plan = planSideStrips(problem, widestMm);
+  const lie = lieOf(input, area, problem, {
+    rows: plan,
+    placements: plan.placements,
+    anyhow: false,
+  });
+  return { ...lie, side, cuts: sideCuts(sound, plan, lie.placements) };
 }

@@ -33,6 +33,8 @@ export interface LayoutInput extends LayRules {
 
 export interface SideInput extends LayRules {
   side: DrawnSide;
+  /** cut it into strips no wider than this first, in mm, each laid in rows; left whole where not said */
+  widestMm?: number;
 }
 
 /** Turn the outline's polygon `rot` degrees counter-clockwise about the origin, then shift it. */
@@ -61,6 +63,25 @@ export interface Layout extends Lie {
 /** A layout on a side, which lies as it was drawn. */
 export interface SideLayout extends Lie {
   side: DrawnSide;
+  /** null where it is left whole */
+  cuts: SideCuts | null;
+}
+
+/** Straight cuts, all one way, that part a side into strips before its pieces are cut. */
+export interface SideCuts {
+  /** the way that the cuts run: along x (width) or along y (height) */
+  along: 'width' | 'height';
+  /** where they cross the other axis, in the side's own mm, rising */
+  at: number[];
+  /** in the order of the cuts, one more than there are cuts */
+  strips: SideStrip[];
+}
+
+export interface SideStrip {
+  widthMm: number;
+  /** from end to end, edge and flaws and all */
+  lengthMm: number;
+  pieces: number;
 }
 
 /** How pieces lie, in cutting order, and where the leather goes. */
