@@ -79,6 +79,12 @@ walk('a side is drawn with its flaws by keyboard and finger, and laid out', asyn
   await page.getByText(/no layout gives more than/).waitFor({ timeout: 120_000 });
   await page.getByRole('button', { name: 'Larger' }).click();
   await expectAccessible(page);
+
+  await keyboardAlone.check(page.getByRole('radio', { name: /^In strips for the press/ }));
+  await keyboardAlone.press(page.getByRole('button', { name: 'Lay it out' }));
+  await page.getByText(/^Cut it (along|across) the spine/).waitFor({ timeout: 120_000 });
+  expect(await page.getByText(/ wide, .* long: /).count()).toBeGreaterThan(1);
+  await expectAccessible(page);
 });
 
 walk('the most pieces of a side are looked for, and the search is stopped', async ({ page }) => {

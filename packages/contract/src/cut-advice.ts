@@ -15,6 +15,8 @@ const row = z.object({
   heightMm: z.string().nullable(),
   lotId: id.nullable(),
   tag: z.string().nullable(),
+  /** Lots: cut for the press into strips no wider than this; null where it is left whole. */
+  stripsMm: z.string().nullable(),
   /** From one panel or lot; of a strip from one repeat. */
   pieces: z.int(),
   /** Reckoned from its area and usable share, since it is not drawn. */

@@ -6,6 +6,7 @@ import {
   choice,
   id,
   idParams,
+  lengthBetween,
   line,
   optionalLine,
   page,
@@ -178,6 +179,17 @@ export const lotLayout = z
     patternName: z.string(),
     outlinePath: z.string(),
     side: z.object({ outline: z.array(point), flaws: z.array(z.array(point)) }),
+    /** The straight cuts that part it into strips first; null where it is left whole. */
+    cuts: z
+      .object({
+        along: z.enum(['width', 'height']),
+        at: z.array(z.number()),
+        strips: z.array(
+          z.object({ widthMm: z.number(), lengthMm: z.number(), pieces: z.int().min(0) }),
+        ),
+      })
+      .nullable()
+      .default(null),
   })
   .meta({ id: 'LotLayout' });
 export type LotLayout = z.infer<typeof lotLayout>;
@@ -191,7 +203,9 @@ export const layOnLot = endpoint({
   params: idParams,
   body: z.strictObject({
     patternId: choice('Choose a pattern.'),
-    search: z.enum(['rows', 'best'], 'Choose rows or best.').default('rows'),
+    search: z.enum(['rows', 'best', 'strips'], 'Choose rows, best or strips.').default('rows'),
+    /** Of strips: how wide one may be. What the widest press in use takes where it is not said. */
+    widestMm: lengthBetween('widest strip', 20, 5000).optional(),
   }),
   reply: lotLayout,
 });

@@ -1,6 +1,8 @@
 import { outlinePath, type SideInput, type SideLayout } from '@hidewright/domain';
 import {
+  type BodyOf,
   layRulesOf,
+  type layOnLot as layOnLotEndpoint,
   type LotDrawing,
   type LotLayout,
   type PatternDefinition,
@@ -11,6 +13,7 @@ import { sideLayoutFor, type Worked } from '../modules/layouts/stored-layouts.ts
 import { Lot } from '../modules/lots/lot.entity.ts';
 import { Pattern } from '../modules/patterns/pattern.entity.ts';
 import { definitionOf, latestVersion } from '../modules/patterns/pattern-versions.ts';
+import { pressReach } from './press-reach.ts';
 
 /** A pattern and a lot as they are drawn, with the names that go with them. */
 export interface AskedOfLot {
@@ -32,10 +35,17 @@ export interface LaidOnLot {
 export async function layOnLot(
   context: Pick<Context, 'orm' | 'workers'>,
   lotId: number,
-  { patternId, search }: { patternId: number; search: 'rows' | 'best' },
+  { patternId, search, widestMm }: BodyOf<typeof layOnLotEndpoint>,
 ): Promise<LaidOnLot> {
   const { names, input } = await askOfLot(context, lotId, patternId);
-  return { names, worked: await sideLayoutFor(context, { ...input, search }) };
+  const asked: SideInput =
+    search === 'strips'
+      ? {
+          ...input,
+          widestMm: Number(widestMm ?? (await pressReach(context.orm.em.fork())).widestStripMm),
+        }
+      : { ...input, search };
+  return { names, worked: await sideLayoutFor(context, asked) };
 }
 
 /** @throws {Problem} 404, 422 where the lot or the pattern is not drawn */

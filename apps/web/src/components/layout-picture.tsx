@@ -25,7 +25,7 @@ interface LayoutPictureProps {
   /** What is left over and worth keeping. */
   offcut?: { x: number; y: number; widthMm: number; heightMm: number } | null | undefined;
   /** Straight cuts that part it into strips for the press. */
-  cuts?: StripCuts | undefined;
+  cuts?: Pick<StripCuts, 'along' | 'at'> | undefined;
   /** How many pieces the spoilage allowance will cost: the last ones are hatched. */
   allowance?: number | undefined;
   /** Along which side the backbone ran. */
@@ -125,7 +125,7 @@ function OffcutMark({ offcut }: { offcut: NonNullable<LayoutPictureProps['offcut
 }
 
 interface CutLinesProps {
-  cuts: StripCuts;
+  cuts: Pick<StripCuts, 'along' | 'at'>;
   widthMm: number;
   heightMm: number;
 }

@@ -33,10 +33,27 @@ async function hang(): Promise<number> {
   return body.lots[0].id as number;
 }
 
+const oblong = [
+  { x: 0, y: 0 },
+  { x: 2000, y: 0 },
+  { x: 2000, y: 900 },
+  { x: 0, y: 900 },
+];
 const panels = [
   { widthMm: '279.4', heightMm: '330.2', price: '9.00' },
   { widthMm: '304.8', heightMm: '609.6', price: null },
 ];
+const addPress = (limits: object) =>
+  shop
+    .as('owner')
+    .post('/api/presses')
+    .send({
+      name: `Clicker ${JSON.stringify(limits).length}`,
+      shutHeightMm: null,
+      ruleMm: null,
+      reliefAreaMm2: null,
+      ...limits,
+    });
 const advise = (id: number, body: object) =>
   shop.as('owner').post(`/api/patterns/${id}/cut-advice`).send(body);
 
@@ -65,17 +82,11 @@ describe('advice on what to cut from', () => {
 
   it('lays the pieces on a side that is drawn', async () => {
     const lotId = await hang();
-    const outline = [
-      { x: 0, y: 0 },
-      { x: 2000, y: 0 },
-      { x: 2000, y: 900 },
-      { x: 0, y: 900 },
-    ];
     await shop
       .as('owner')
       .put(`/api/lots/${lotId}/drawing`)
       .set('If-Match', '"1"')
-      .send({ outline, flaws: [], usablePercent: '85' })
+      .send({ outline: oblong, flaws: [], usablePercent: '85' })
       .expect(200);
     const laid = await shop
       .as('maker')
@@ -86,6 +97,30 @@ describe('advice on what to cut from', () => {
     const reply = await advise(patternId, { good: 50, panels: [] }).expect(200);
     const row = (reply.body as CutAdviceReply).rows.find((each) => each.lotId === lotId);
     expect(row).toMatchObject({ pieces: laid.body.pieces, estimated: false });
+  });
+
+  it('compares a drawn side in strips too where no press takes it whole', async () => {
+    const lotId = await hang();
+    await shop
+      .as('owner')
+      .put(`/api/lots/${lotId}/drawing`)
+      .set('If-Match', '"1"')
+      .send({ outline: oblong, flaws: [], usablePercent: '85' })
+      .expect(200);
+    const rowsOf = async () => {
+      const reply = await advise(patternId, { good: 50, panels: [] }).expect(200);
+      const { rows, rack } = reply.body as CutAdviceReply;
+      return { rows: rows.filter((row) => row.lotId === lotId), rack };
+    };
+    expect((await rowsOf()).rows).toMatchObject([{ stripsMm: null }]);
+    const press = await addPress({ bedWidthMm: '500', bedDepthMm: '400', throatMm: '280' });
+    const { rows, rack } = await rowsOf();
+    expect(rows).toMatchObject([{ stripsMm: null }, { stripsMm: '280', estimated: false }]);
+    expect(rows[1]?.pieces).toBeLessThanOrEqual(rows[0]?.pieces ?? 0);
+    expect(rack?.filter((lot) => lot.lotId === lotId).length).toBeLessThanOrEqual(1);
+    await addPress({ bedWidthMm: '3000', bedDepthMm: '2000', throatMm: null });
+    expect((await rowsOf()).rows).toMatchObject([{ stripsMm: null }]);
+    expect(press.status).toBe(201);
   });
 
   it('asks for a drawing where there is none', async () => {

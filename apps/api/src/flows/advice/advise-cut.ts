@@ -5,6 +5,7 @@ import {
   goodShare,
   minorDigits,
   type CutAdvice,
+  type RackLot,
 } from '@hidewright/domain';
 import {
   layRulesOf,
@@ -22,8 +23,8 @@ import {
   findPattern,
   latestVersion,
 } from '../../modules/patterns/pattern-versions.ts';
-import { Press } from '../../modules/presses/press.entity.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
+import { pressReach } from '../press-reach.ts';
 import type { AdvisedSource } from './advised-source.ts';
 import { lotSources } from './lot-sources.ts';
 import { panelSources } from './panel-sources.ts';
@@ -48,13 +49,14 @@ export async function adviseCut(
   const workshop = await em.findOneOrFail(Workshop, 1);
   const leather = await em.findOneOrFail(Leather, definition.leatherId);
   const priceOf = priceOfArea(priceText(leather.pricePerFt2));
-  const widths = stripWidths(rules.outline, rules.trimMm, await em.find(Press, { active: true }));
+  const reach = await pressReach(em);
+  const widths = stripWidths(rules.outline, rules.trimMm, reach.widestStripMm);
   const strips = await stripSources(context, rules, widths, priceOf);
   const asked = { ...definition, layoutBy: 'outline' as const, handCount: null };
   const sources = [
     ...(await panelSources(context, asked, rules.outline, panels, priceOf)),
     ...strips,
-    ...(await lotSources(context, definition, strips[0] ? areaPerPiece(strips[0]) : null)),
+    ...(await lotSources(context, definition, reach, strips[0] ? areaPerPiece(strips[0]) : null)),
   ];
   const { pieces: cut } = cutCount({
     good,
@@ -70,7 +72,7 @@ export async function adviseCut(
     good,
     cut,
     rows: sources.map((source, at) => rowOf(source, advice[at] as CutAdvice, cut)),
-    rack: adviseLots(sources.flatMap(rackLotOf), cut),
+    rack: adviseLots(rackLots(sources), cut),
   };
 }
 
@@ -97,5 +99,12 @@ function rowOf(
   };
 }
 
-const rackLotOf = ({ source: { pieces }, shown: { lotId, tag } }: AdvisedSource) =>
-  lotId === null || tag === null ? [] : [{ lotId, tag, pieces }];
+/** Every lot once: what goes under the press in strips gives what its strips give. */
+function rackLots(sources: readonly AdvisedSource[]): RackLot[] {
+  const lots = new Map<number, RackLot>();
+  for (const { source, shown } of sources) {
+    const { lotId, tag } = shown;
+    if (lotId !== null && tag !== null) lots.set(lotId, { lotId, tag, pieces: source.pieces });
+  }
+  return [...lots.values()];
+}

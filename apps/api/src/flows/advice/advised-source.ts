@@ -6,7 +6,7 @@ type Row = CutAdviceReply['rows'][number];
 /** Something that a run can be cut from, as the domain compares it and as the reply shows it. */
 export interface AdvisedSource {
   source: CutSource;
-  shown: Pick<Row, 'kind' | 'widthMm' | 'heightMm' | 'lotId' | 'tag' | 'estimated'>;
+  shown: Pick<Row, 'kind' | 'widthMm' | 'heightMm' | 'lotId' | 'tag' | 'stripsMm' | 'estimated'>;
   /** Strips: length of one repeat. */
   periodMm: number | null;
   /** Panels: what is left when only so many pieces of one are cut. */

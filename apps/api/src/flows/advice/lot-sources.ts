@@ -1,50 +1,77 @@
 import type { PatternDefinition } from '@hidewright/contract';
-import { Exact, toAtMost, toPlaces } from '@hidewright/domain';
+import { Exact, toAtMost, toPlaces, type SideInput } from '@hidewright/domain';
 import type { Context } from '../../context.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
 import { sideLayoutFor } from '../../modules/layouts/stored-layouts.ts';
 import { freeLotsOf } from '../check/leather-for-check.ts';
 import { sideInputOf } from '../lay-on-lot.ts';
+import type { PressReach } from '../press-reach.ts';
 import type { AdvisedSource } from './advised-source.ts';
 
 /**
- * Each lot on the rack that gives a piece, and how many: laid out where it is drawn, otherwise reckoned from what is
- * free of it, its usable share and the leather that each piece takes.
+ * Each lot on the rack that gives a piece, and how many: laid out where it is drawn, whole and, where no press takes
+ * it whole, in strips; otherwise reckoned from what is free of it, its usable share and the leather that each piece
+ * takes.
  * @param areaPerPieceMm2 in the middle of a good layout; null where none is known
  */
 export async function lotSources(
   context: Context,
   definition: PatternDefinition,
+  reach: PressReach,
   areaPerPieceMm2: number | null,
 ): Promise<AdvisedSource[]> {
   const em = context.orm.em.fork();
   const free = await freeLotsOf(em, definition.leatherId);
   const lots = await em.find(Lot, { id: { $in: free.map(({ lotId }) => lotId) } });
   const sources = await Promise.all(
-    free.flatMap((each) => {
-      const lot = lots.find(({ id }) => id === each.lotId);
-      return lot ? [lotSource(context, lot, each.freeAreaMm2, definition, areaPerPieceMm2)] : [];
+    free.map(async ({ lotId, freeAreaMm2 }) => {
+      const lot = lots.find(({ id }) => id === lotId);
+      if (!lot) return [];
+      const input = sideInputOf(lot, definition);
+      return typeof input === 'string'
+        ? [sourceOf(lot, freeAreaMm2, { whole: usablePieces(lot, areaPerPieceMm2), drawn: false })]
+        : drawnSources(context, lot, freeAreaMm2, input, reach);
     }),
   );
-  return sources.filter(({ source }) => source.pieces > 0);
+  return sources.flat().filter(({ source }) => source.pieces > 0);
 }
 
-async function lotSource(
+async function drawnSources(
   context: Context,
   lot: Lot,
   freeAreaMm2: string,
-  definition: PatternDefinition,
-  areaPerPieceMm2: number | null,
-): Promise<AdvisedSource> {
+  input: SideInput,
+  { takesWhole, widestStripMm }: PressReach,
+): Promise<AdvisedSource[]> {
+  const ways: SideInput[] = [
+    { ...input, search: 'rows' },
+    ...(takesWhole(input.side) ? [] : [{ ...input, widestMm: widestStripMm }]),
+  ];
+  return Promise.all(
+    ways.map(async (way) => {
+      const { layout } = await sideLayoutFor(context, way);
+      const stripsMm = way.widestMm ?? null;
+      return sourceOf(lot, freeAreaMm2, { whole: layout.pieces, drawn: true, stripsMm });
+    }),
+  );
+}
+
+/** What the whole lot gives, and how that is known. */
+interface Known {
+  whole: number;
+  drawn: boolean;
+  stripsMm?: number | null;
+}
+
+function sourceOf(
+  lot: Lot,
+  freeAreaMm2: string,
+  { whole, drawn, stripsMm = null }: Known,
+): AdvisedSource {
   const share = new Exact(freeAreaMm2).div(lot.measuredAreaMm2.toString());
-  const input = sideInputOf(lot, definition);
-  const drawn = typeof input !== 'string';
-  const whole = drawn
-    ? (await sideLayoutFor(context, { ...input, search: 'rows' })).layout.pieces
-    : usablePieces(lot, areaPerPieceMm2);
   return {
     source: {
-      key: `lot ${lot.id}`,
+      key: `lot ${lot.id}${stripsMm === null ? '' : ' in strips'}`,
       // What is gone of a side is not drawn, so its pieces go down in proportion.
       pieces: share.times(whole).floor().toNumber(),
       areaMm2: toAtMost(new Exact(freeAreaMm2), 3),
@@ -57,6 +84,7 @@ async function lotSource(
       heightMm: null,
       lotId: lot.id,
       tag: lot.tag,
+      stripsMm: stripsMm === null ? null : String(stripsMm),
       estimated: !drawn || share.lt(1),
     },
     periodMm: null,

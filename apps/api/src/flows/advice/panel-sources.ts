@@ -31,7 +31,15 @@ export async function panelSources(
           price: price ?? priceOf(layout.containerAreaMm2),
           available: null,
         },
-        shown: { kind: 'panel', widthMm, heightMm, lotId: null, tag: null, estimated: false },
+        shown: {
+          kind: 'panel',
+          widthMm,
+          heightMm,
+          lotId: null,
+          tag: null,
+          stripsMm: null,
+          estimated: false,
+        },
         periodMm: null,
         offcutAfter: (pieces) => offcutOf(outline, layout, pieces),
       };

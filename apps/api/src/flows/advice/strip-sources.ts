@@ -46,6 +46,7 @@ function stripSource(
       heightMm: null,
       lotId: null,
       tag: null,
+      stripsMm: null,
       estimated: false,
     },
     periodMm: period.mm,

@@ -11,9 +11,15 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLayOnLot, useStartLotSearch } from '../lots.mutations.ts';
 import { boxOf } from '../side-sketch.ts';
 import { RunningSearch } from './running-search.tsx';
+import { cutsFrom, StripsCut } from './strips-cut.tsx';
 
 const searches = [
   { value: 'rows', label: 'In rows', detail: 'which a hand repeats with the die' },
+  {
+    value: 'strips',
+    label: 'In strips for the press',
+    detail: 'cut apart first, then the same rows in each strip',
+  },
   { value: 'best', label: 'As many as can be found', detail: 'searched for; takes a while' },
 ];
 
@@ -77,12 +83,14 @@ function Laid({ laid }: { laid: LotLayout }) {
         placements={laid.placements.map((each) => ({ ...each, ...moved(each) }))}
         widthMm={width}
         heightMm={height}
+        cuts={laid.cuts ? cutsFrom(laid.cuts, { x, y }) : undefined}
         offcut={laid.offcut && { ...laid.offcut, ...moved(laid.offcut) }}
         side={{
           outline: laid.side.outline.map(moved),
           flaws: laid.side.flaws.map((flaw) => flaw.map(moved)),
         }}
       />
+      {laid.cuts && <StripsCut cuts={laid.cuts} />}
       <KeyFigures
         figures={[
           {

@@ -127,10 +127,16 @@ function columnsFor({ lengthUnit, areaUnit, currency }: Workshop): Column<Row>[]
 }
 
 function wordsOf(row: Row, unit: Workshop['lengthUnit']): string {
-  if (row.kind === 'lot') return `Lot ${row.tag}`;
+  if (row.kind === 'lot') {
+    const strips = row.stripsMm === null ? '' : `, ${inStrips(row.stripsMm, unit)}`;
+    return `Lot ${row.tag}${strips}`;
+  }
   if (row.kind === 'strip') return `Strip, ${lengthText(row.widthMm ?? '0', unit)} wide`;
   return `Panel, ${sizeText(row.widthMm ?? '0', row.heightMm ?? '0', unit)}`;
 }
+
+const inStrips = (widestMm: string, unit: Workshop['lengthUnit']): string =>
+  `in strips for the press, at most ${lengthText(widestMm, unit)} wide`;
 
 /** From one panel or lot; of a strip how many come again after how much. */
 function givesWords(row: Row, unit: Workshop['lengthUnit']): string {
