@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { CutAdviceReply } from '@hidewright/contract';
+import { StoredLayout } from '../../modules/layouts/layout.entity.ts';
 import { coaster } from '../../testing/example-pattern.ts';
 import { ft2, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
@@ -57,7 +58,7 @@ const addPress = (limits: object) =>
 const advise = (id: number, body: object) =>
   shop.as('owner').post(`/api/patterns/${id}/cut-advice`).send(body);
 
-describe('advice on what to cut from', () => {
+describe('advice on what to cut from', { timeout: 300_000 }, () => {
   it('compares panels, strips and lots, with the whole price beside the share', async () => {
     const lotId = await hang();
     const reply = await advise(patternId, { good: 50, panels }).expect(200);
@@ -97,6 +98,24 @@ describe('advice on what to cut from', () => {
     const reply = await advise(patternId, { good: 50, panels: [] }).expect(200);
     const row = (reply.body as CutAdviceReply).rows.find((each) => each.lotId === lotId);
     expect(row).toMatchObject({ pieces: laid.body.pieces, estimated: false });
+  });
+
+  it('keeps what it compared: the second time nothing is worked out', async () => {
+    const asked = { good: 50, panels };
+    const first = await advise(patternId, asked).expect(200);
+    const em = shop.context.orm.em.fork();
+    const before = await em.count(StoredLayout);
+    const { workers } = shop.context;
+    shop.context.workers = {
+      ...workers,
+      layOut: () => Promise.reject(new Error('A strip or panel is worked out again.')),
+      layOutSide: () => Promise.reject(new Error('A side is worked out again.')),
+    };
+    const again = await advise(patternId, asked);
+    shop.context.workers = workers;
+    expect(again.status).toBe(200);
+    expect(again.body).toEqual(first.body);
+    expect(await em.count(StoredLayout)).toBe(before);
   });
 
   it('compares a drawn side in strips too where no press takes it whole', async () => {

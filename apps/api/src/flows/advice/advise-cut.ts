@@ -17,6 +17,7 @@ import {
 import type { Context } from '../../context.ts';
 import { priceText } from '../../http/decimal-text.ts';
 import { invalid } from '../../http/problem.ts';
+import type { LayoutToKeep } from '../../modules/layouts/stored-layouts.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
 import {
   definitionOf,
@@ -25,12 +26,18 @@ import {
 } from '../../modules/patterns/pattern-versions.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import { pressReach } from '../press-reach.ts';
-import type { AdvisedSource } from './advised-source.ts';
+import type { AdvisedSource, Note } from './advised-source.ts';
 import { lotSources } from './lot-sources.ts';
 import { panelSources } from './panel-sources.ts';
 import { priceOfArea } from './price-of-area.ts';
 import { areaPerPiece, stripSources } from './strip-sources.ts';
 import { stripWidths } from './strip-widths.ts';
+
+/** An answer, and the layouts behind it: the transaction that gives it keeps them for the next time. */
+export interface WorkedAdvice {
+  reply: CutAdviceReply;
+  compared: readonly LayoutToKeep[];
+}
 
 /**
  * What a run of a pattern is best cut from: the panels on offer, strips of the widths that a press takes, and the
@@ -41,7 +48,7 @@ export async function adviseCut(
   context: Context,
   patternId: number,
   { good, panels }: BodyOf<typeof adviseCutEndpoint>,
-): Promise<CutAdviceReply> {
+): Promise<WorkedAdvice> {
   const em = context.orm.em.fork();
   const pattern = await findPattern({ em }, patternId);
   const definition = definitionOf(await latestVersion({ em }, pattern));
@@ -51,12 +58,23 @@ export async function adviseCut(
   const priceOf = priceOfArea(priceText(leather.pricePerFt2));
   const reach = await pressReach(em);
   const widths = stripWidths(rules.outline, rules.trimMm, reach.widestStripMm);
-  const strips = await stripSources(context, rules, widths, priceOf);
+  const compared: LayoutToKeep[] = [];
+  const note: Note = (worked) => {
+    compared.push(worked);
+    return worked;
+  };
+  const strips = await stripSources(context, rules, widths, priceOf, note);
   const asked = { ...definition, layoutBy: 'outline' as const, handCount: null };
   const sources = [
-    ...(await panelSources(context, asked, rules.outline, panels, priceOf)),
+    ...(await panelSources(context, asked, rules.outline, panels, priceOf, note)),
     ...strips,
-    ...(await lotSources(context, definition, reach, strips[0] ? areaPerPiece(strips[0]) : null)),
+    ...(await lotSources(
+      context,
+      definition,
+      reach,
+      strips[0] ? areaPerPiece(strips[0]) : null,
+      note,
+    )),
   ];
   const { pieces: cut } = cutCount({
     good,
@@ -68,12 +86,13 @@ export async function adviseCut(
     run,
     sources.map(({ source }) => source),
   );
-  return {
+  const reply = {
     good,
     cut,
     rows: sources.map((source, at) => rowOf(source, advice[at] as CutAdvice, cut)),
     rack: adviseLots(rackLots(sources), cut),
   };
+  return { reply, compared };
 }
 
 function rulesOf(definition: PatternDefinition) {

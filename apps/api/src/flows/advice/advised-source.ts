@@ -1,5 +1,6 @@
 import type { CutSource } from '@hidewright/domain';
 import type { CutAdviceReply } from '@hidewright/contract';
+import type { LayoutToKeep } from '../../modules/layouts/stored-layouts.ts';
 
 type Row = CutAdviceReply['rows'][number];
 
@@ -12,3 +13,6 @@ export interface AdvisedSource {
   /** Panels: what is left when only so many pieces of one are cut. */
   offcutAfter: ((pieces: number) => Row['offcut']) | null;
 }
+
+/** Notes a layout that is compared, shown or not, so that it is kept. */
+export type Note = <Laid extends LayoutToKeep>(worked: Laid) => Laid;

@@ -6,7 +6,7 @@ import { sideLayoutFor } from '../../modules/layouts/stored-layouts.ts';
 import { freeLotsOf } from '../check/leather-for-check.ts';
 import { sideInputOf } from '../lay-on-lot.ts';
 import type { PressReach } from '../press-reach.ts';
-import type { AdvisedSource } from './advised-source.ts';
+import type { AdvisedSource, Note } from './advised-source.ts';
 
 /**
  * Each lot on the rack that gives a piece, and how many: laid out where it is drawn, whole and, where no press takes
@@ -19,6 +19,7 @@ export async function lotSources(
   definition: PatternDefinition,
   reach: PressReach,
   areaPerPieceMm2: number | null,
+  note: Note,
 ): Promise<AdvisedSource[]> {
   const em = context.orm.em.fork();
   const free = await freeLotsOf(em, definition.leatherId);
@@ -28,46 +29,34 @@ export async function lotSources(
       const lot = lots.find(({ id }) => id === lotId);
       if (!lot) return [];
       const input = sideInputOf(lot, definition);
-      return typeof input === 'string'
-        ? [sourceOf(lot, freeAreaMm2, { whole: usablePieces(lot, areaPerPieceMm2), drawn: false })]
-        : drawnSources(context, lot, freeAreaMm2, input, reach);
+      const known =
+        typeof input === 'string'
+          ? [{ whole: usablePieces(lot, areaPerPieceMm2), drawn: false, stripsMm: null }]
+          : await Promise.all(waysFor(input, reach).map((way) => laidOn(context, way, note)));
+      return known.map((each) => sourceOf(lot, freeAreaMm2, each));
     }),
   );
   return sources.flat().filter(({ source }) => source.pieces > 0);
 }
 
-async function drawnSources(
-  context: Context,
-  lot: Lot,
-  freeAreaMm2: string,
-  input: SideInput,
-  { takesWhole, widestStripMm }: PressReach,
-): Promise<AdvisedSource[]> {
-  const ways: SideInput[] = [
-    { ...input, search: 'rows' },
-    ...(takesWhole(input.side) ? [] : [{ ...input, widestMm: widestStripMm }]),
-  ];
-  return Promise.all(
-    ways.map(async (way) => {
-      const { layout } = await sideLayoutFor(context, way);
-      const stripsMm = way.widestMm ?? null;
-      return sourceOf(lot, freeAreaMm2, { whole: layout.pieces, drawn: true, stripsMm });
-    }),
-  );
+const waysFor = (input: SideInput, { takesWhole, widestStripMm }: PressReach): SideInput[] => [
+  { ...input, search: 'rows' },
+  ...(takesWhole(input.side) ? [] : [{ ...input, widestMm: widestStripMm }]),
+];
+
+async function laidOn(context: Context, input: SideInput, note: Note): Promise<Known> {
+  const { layout } = note(await sideLayoutFor(context, input));
+  return { whole: layout.pieces, drawn: true, stripsMm: input.widestMm ?? null };
 }
 
 /** What the whole lot gives, and how that is known. */
 interface Known {
   whole: number;
   drawn: boolean;
-  stripsMm?: number | null;
+  stripsMm: number | null;
 }
 
-function sourceOf(
-  lot: Lot,
-  freeAreaMm2: string,
-  { whole, drawn, stripsMm = null }: Known,
-): AdvisedSource {
+function sourceOf(lot: Lot, freeAreaMm2: string, { whole, drawn, stripsMm }: Known): AdvisedSource {
   const share = new Exact(freeAreaMm2).div(lot.measuredAreaMm2.toString());
   return {
     source: {

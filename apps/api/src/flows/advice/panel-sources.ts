@@ -2,7 +2,7 @@ import { largestOffcut, placedRing, type Layout, type Outline } from '@hidewrigh
 import type { LayoutAsked } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { layoutFor } from '../../modules/layouts/stored-layouts.ts';
-import type { AdvisedSource } from './advised-source.ts';
+import type { AdvisedSource, Note } from './advised-source.ts';
 import type { Price } from './price-of-area.ts';
 
 interface Panel {
@@ -18,11 +18,12 @@ export async function panelSources(
   outline: Outline,
   panels: readonly Panel[],
   priceOf: Price,
+  note: Note,
 ): Promise<AdvisedSource[]> {
   return Promise.all(
     panels.map(async ({ widthMm, heightMm, price }, at) => {
       const container = { form: 'panel' as const, widthMm, heightMm };
-      const { layout } = await layoutFor(context, { ...asked, container });
+      const { layout } = note(await layoutFor(context, { ...asked, container }));
       return {
         source: {
           key: `panel ${at}`,

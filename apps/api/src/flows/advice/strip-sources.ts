@@ -1,19 +1,24 @@
 import type { LayoutInput } from '@hidewright/domain';
 import type { Context } from '../../context.ts';
-import type { AdvisedSource } from './advised-source.ts';
+import { stripLayoutFor } from '../../modules/layouts/stored-layouts.ts';
+import type { AdvisedSource, Note } from './advised-source.ts';
 import type { Price } from './price-of-area.ts';
 
 const shownAtMost = 3;
 
 /** Strips without an end, of several widths: the few that take the least leather for each piece. */
 export async function stripSources(
-  { workers }: Pick<Context, 'workers'>,
+  context: Pick<Context, 'orm' | 'workers'>,
   rules: Omit<LayoutInput, 'container'>,
   widths: readonly number[],
   priceOf: Price,
+  note: Note,
 ): Promise<AdvisedSource[]> {
   const laid = await Promise.all(
-    widths.map((widthMm) => workers.layOut({ ...rules, container: { form: 'strip', widthMm } })),
+    widths.map(async (widthMm) => {
+      const container = { form: 'strip' as const, widthMm };
+      return note(await stripLayoutFor(context, { ...rules, container })).layout;
+    }),
   );
   return laid
     .flatMap(({ period, containerAreaMm2, container }) =>

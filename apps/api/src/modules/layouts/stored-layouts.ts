@@ -4,6 +4,7 @@ import {
   layoutInputKey,
   outlinePath,
   type Layout,
+  type LayoutInput,
   type SideInput,
   type SideLayout,
 } from '@hidewright/domain';
@@ -48,6 +49,15 @@ export async function layoutFor(
   );
 }
 
+/** The layout of a strip without an end, found or worked out in the same way. */
+export async function stripLayoutFor(
+  context: Pick<Context, 'orm' | 'workers'>,
+  input: LayoutInput,
+): Promise<WorkedLayout> {
+  const source = { by: 'outline' as const, input };
+  return workedOnce(context, source, hashOf(source), () => context.workers.layOut(input));
+}
+
 /**
  * The layout of pieces on a drawn side, found or worked out in the same way.
  * @param workOut how, where it is not known: by a worker, unless said
@@ -71,10 +81,13 @@ async function workedOnce<Source, Laid>(
   return { inputHash, source, layout };
 }
 
+/** A layout of any kind, as far as keeping it goes. */
+export type LayoutToKeep = Worked<unknown, { pieces: number }>;
+
 /** Stores a layout once, in the transaction that uses it; the same input finds the same row. */
 export async function keepLayout(
   work: Pick<Work, 'em' | 'now'>,
-  worked: Worked<unknown, { pieces: number }>,
+  worked: LayoutToKeep,
 ): Promise<StoredLayout> {
   const { inputHash, source, layout } = worked;
   const stored = await work.em.findOne(StoredLayout, { inputHash });

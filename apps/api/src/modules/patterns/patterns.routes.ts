@@ -2,19 +2,18 @@ import { Router } from 'express';
 import {
   addPattern as addPatternEndpoint,
   adviseCut as adviseCutEndpoint,
-  type CutAdviceReply,
   changePattern as changePatternEndpoint,
   listPatterns as listPatternsEndpoint,
   listPatternVersions,
   readPattern,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
-import { adviseCut } from '../../flows/advice/advise-cut.ts';
+import { adviseCut, type WorkedAdvice } from '../../flows/advice/advise-cut.ts';
 import { addPattern, changePattern } from '../../flows/save-pattern.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
-import { layoutFor, type WorkedLayout } from '../layouts/stored-layouts.ts';
+import { keepLayout, layoutFor, type WorkedLayout } from '../layouts/stored-layouts.ts';
 import { PatternVersion } from './pattern-version.entity.ts';
 import { definitionOf, findPattern, latestVersion } from './pattern-versions.ts';
 import type { Pattern } from './pattern.entity.ts';
@@ -80,7 +79,10 @@ export function patternRoutes(context: Context): Router {
     router,
     context,
     adviseCutEndpoint,
-    (_work, _asked, advice: CutAdviceReply) => Promise.resolve(advice),
+    async (work, _asked, { reply: advice, compared }: WorkedAdvice) => {
+      for (const worked of compared) await keepLayout(work, worked);
+      return advice;
+    },
     ({ params, body }) => adviseCut(context, params.id, body),
   );
 
