@@ -8,6 +8,7 @@ export {
   toText,
 } from './numbers/decimal-text.ts';
 export type { DecimalText, Limits } from './numbers/decimal-text.ts';
+export { countWords } from './numbers/count-words.ts';
 export { normalLoss, normalQuantile } from './numbers/normal.ts';
 
 export * from './units/measures.ts';
@@ -78,6 +79,7 @@ export * from './work/ways-of-working.ts';
 export * from './work/learning.ts';
 export * from './work/time-study.ts';
 
+export * from './tooling/plate-advice.ts';
 export * from './tooling/plate-choice.ts';
 
 export type * from './costing/run-input.ts';
