@@ -36,6 +36,7 @@ import { supplierRoutes } from './modules/suppliers/suppliers.routes.ts';
 import { taxRateRoutes } from './modules/tax-rates/tax-rates.routes.ts';
 import { timeReadingRoutes } from './modules/time-readings/time-readings.routes.ts';
 import { todayRoutes } from './modules/today/today.routes.ts';
+import { plateOfferRoutes } from './modules/tools/plate-offers.routes.ts';
 import { toolRoutes } from './modules/tools/tools.routes.ts';
 import { workshopRoutes } from './modules/workshop/workshop.routes.ts';
 import { sessionRoutes } from './modules/session/session.routes.ts';
@@ -59,6 +60,7 @@ const rooms: ((context: Context) => Router)[] = [
   timeReadingRoutes,
   layoutRoutes,
   toolRoutes,
+  plateOfferRoutes,
   pressRoutes,
   jobRoutes,
   lotRoutes,

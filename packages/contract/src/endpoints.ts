@@ -17,6 +17,7 @@ import * as orders from './orders.ts';
 import * as patterns from './patterns.ts';
 import * as people from './people.ts';
 import * as periods from './periods.ts';
+import * as plateOffers from './plate-offers.ts';
 import * as presses from './presses.ts';
 import * as purchaseOrders from './purchase-orders.ts';
 import * as quotes from './quotes.ts';
@@ -28,6 +29,7 @@ import * as system from './system.ts';
 import * as taxRates from './tax-rates.ts';
 import * as timeReadings from './time-readings.ts';
 import * as today from './today.ts';
+import * as toolingAdvice from './tooling-advice.ts';
 import * as tools from './tools.ts';
 import * as variances from './variances.ts';
 import * as workshop from './workshop.ts';
@@ -50,6 +52,8 @@ const rooms: Record<string, unknown>[] = [
   cutAdvice,
   layouts,
   tools,
+  plateOffers,
+  toolingAdvice,
   presses,
   jobs,
   variances,

@@ -18,6 +18,7 @@ const toDo = z.object({
     'invoice',
     'remind',
     'lock',
+    'give back',
     'start',
   ]),
   title: z.string(),

@@ -3,6 +3,7 @@ import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import {
   areaMm2,
+  day,
   id,
   idParams,
   instant,
@@ -17,12 +18,15 @@ import {
 } from './fields.ts';
 
 export const toolKinds = ['cutting die', 'stamp plate'] as const;
-export const toolStates = ['on the rack', 'on order', 'scrapped'] as const;
+export const toolStates = ['on the rack', 'on order', 'returned', 'scrapped'] as const;
+export const toolOwners = ['shop', 'customer'] as const;
 export const plateMetals = ['steel', 'magnesium', 'copper', 'brass'] as const;
 
 const kind = z.enum(toolKinds, 'Choose cutting die or stamp plate.');
-const state = z.enum(toolStates, 'Choose on the rack, on order or scrapped.');
+const state = z.enum(toolStates, 'Choose on the rack or on order.');
 const metal = z.enum(['', ...plateMetals], 'Choose magnesium, copper, brass or steel.');
+
+const lifeSentence = 'Enter how many cuts or impressions it lasts, 1 or more.';
 
 const fewMm = (word: string) => lengthBetween(word, 0, 20).nullable();
 
@@ -39,10 +43,17 @@ const typed = {
   metal,
   cost: money,
   /** How many cuts or impressions it is good for. */
-  lifeUses: positiveCount,
+  lifeUses: z
+    .int(lifeSentence)
+    .min(1, lifeSentence)
+    .max(10_000_000, 'Enter a life of at most 10,000,000.'),
   slot: optionalLine(40),
   patternId: id.nullable(),
   customerId: id.nullable(),
+  /** The shop's, or the customer's own: then it is kept for a term and given back or scrapped. */
+  ownedBy: z.enum(toolOwners, 'Choose the shop’s own or the customer’s own.'),
+  /** The last day of that term; null where none is agreed, and for the shop's own. */
+  keptUntil: day.nullable(),
   state,
   ...atThePress,
 };
@@ -66,6 +77,10 @@ export const tool = z
     patternName: z.string().nullable(),
     customerId: id.nullable(),
     customerName: z.string().nullable(),
+    ownedBy: z.enum(toolOwners),
+    keptUntil: day.nullable(),
+    /** The customer's own, still here, and its last day has come: give it back or scrap it. */
+    termOver: z.boolean(),
     state,
     piecesPerStrike: z.int(),
     ruleThicknessMm: z.string().nullable(),
@@ -125,6 +140,8 @@ export const addTool = endpoint({
     slot: typed.slot.default(''),
     patternId: typed.patternId.default(null),
     customerId: typed.customerId.default(null),
+    ownedBy: typed.ownedBy.default('shop'),
+    keptUntil: typed.keptUntil.default(null),
     state: state.default('on the rack'),
     piecesPerStrike: atThePress.piecesPerStrike.default(1),
     ruleThicknessMm: atThePress.ruleThicknessMm.default(null),
@@ -142,6 +159,28 @@ export const changeTool = endpoint({
   edits: true,
   params: idParams,
   body: z.strictObject({ ...typed, number: line(12, 'Enter the number it goes by.') }).partial(),
+  reply: tool,
+});
+
+export const giveBackTool = endpoint({
+  method: 'POST',
+  path: '/tools/{id}/returns',
+  summary: 'Give a customer’s own cutting die or stamp plate back',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({}),
+  reply: tool,
+});
+
+export const scrapTool = endpoint({
+  method: 'POST',
+  path: '/tools/{id}/scrappings',
+  summary: 'Scrap a cutting die or stamp plate: no job is given it any more',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({}),
   reply: tool,
 });
 

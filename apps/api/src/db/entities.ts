@@ -34,6 +34,7 @@ import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { TaxRate } from '../modules/tax-rates/tax-rate.entity.ts';
 import { TimeReading } from '../modules/time-readings/time-reading.entity.ts';
 import { Impression } from '../modules/tools/impression.entity.ts';
+import { PlateOffer } from '../modules/tools/plate-offer.entity.ts';
 import { Tool } from '../modules/tools/tool.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import { Counter } from './counter.entity.ts';
@@ -62,6 +63,7 @@ export const entities = [
   Payment,
   Period,
   Person,
+  PlateOffer,
   Posting,
   Press,
   PurchaseLine,

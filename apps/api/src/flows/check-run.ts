@@ -77,7 +77,7 @@ export async function checkPlan(
   const leather = await em.findOneOrFail(Leather, plan.leatherId);
   const lots = await freeLotsOf(em, plan.leatherId);
   const hardware = await hardwareForCheck(em, plan.hardware);
-  const tooling = await toolingForCheck(em, { ...plan, customerId, strikes: plan.cutCount });
+  const tooling = await toolingForCheck(em, { ...plan, customerId, pieces: plan.cutCount });
   const hours = await hoursForCheck(work, plan.plannedMinutes, by);
   const input: CheckInput = {
     leather: { name: leather.name, neededAreaMm2: plan.leatherAreaMm2, lots },

@@ -12,7 +12,7 @@ import { definitionOf } from '../modules/patterns/pattern-versions.ts';
 import { releaseReservations, returnStock } from '../modules/stock/stock-ledger.ts';
 import { addImpressions } from '../modules/tools/tool-ledger.ts';
 import type { Work } from '../work.ts';
-import { chooseTool, toolsFor } from './choose-tools.ts';
+import { chooseTool, strikesFor, toolsFor } from './choose-tools.ts';
 import { startIfReady } from './start-job.ts';
 
 export interface Finished {
@@ -73,16 +73,17 @@ async function bringBack(
   }
 }
 
-async function countStrikes(work: Work, job: Job, order: Order, uses: number): Promise<void> {
+async function countStrikes(work: Work, job: Job, order: Order, pieces: number): Promise<void> {
   const version = await work.em.findOneOrFail(PatternVersion, job.patternVersionId);
   const { needsDie, needsPlate } = definitionOf(version);
   const forWhom = { patternId: version.patternId, customerId: order.customerId };
   const kinds = [needsPlate ? 'stamp plate' : null, needsDie ? 'cutting die' : null] as const;
   for (const kind of kinds) {
     if (kind === null) continue;
-    const tool = chooseTool(await toolsFor(work.em, kind, forWhom), uses);
-    if (tool !== undefined)
-      await addImpressions(work, { toolId: tool.id, uses, jobId: job.id, reason: job.number });
+    const tool = chooseTool(await toolsFor(work.em, kind, forWhom), pieces);
+    if (tool === undefined) continue;
+    const uses = strikesFor(tool, pieces);
+    await addImpressions(work, { toolId: tool.id, uses, jobId: job.id, reason: job.number });
   }
 }
 

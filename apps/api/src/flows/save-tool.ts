@@ -17,7 +17,8 @@ import type { Work } from '../work.ts';
 
 /**
  * Adds a cutting die or stamp plate.
- * @throws {Problem} 422 when its number is taken, its metal does not suit its kind, or its pattern or customer does not exist
+ * @throws {Problem} 422 when its number is taken, its metal does not suit its kind, a customer's own names no customer, or its
+ * pattern or customer does not exist
  */
 export async function addTool(work: Work, asked: BodyOf<typeof addToolEndpoint>): Promise<Tool> {
   const number = asked.number === '' ? await nextNumber(work, asked.kind) : asked.number;
@@ -73,19 +74,21 @@ function afterChange(
   tool: Tool,
   change: { [K in keyof Checked]?: Checked[K] | undefined },
 ): Checked {
-  const { id, kind, number, metal, patternId, customerId } = tool;
-  const checked = { id, kind, number, metal, patternId, customerId };
+  const { id, kind, number, metal, patternId, customerId, ownedBy, keptUntil, state } = tool;
+  const checked = { id, kind, number, metal, patternId, customerId, ownedBy, keptUntil, state };
   assignDefined<Checked>(checked, change);
   return checked;
 }
 
-type Checked = Pick<Tool, 'kind' | 'number' | 'metal' | 'patternId' | 'customerId'> & {
-  id?: number;
-};
+type Checked = Pick<
+  Tool,
+  'kind' | 'number' | 'metal' | 'patternId' | 'customerId' | 'ownedBy' | 'keptUntil' | 'state'
+> & { id?: number };
 
 async function requireSound(work: Work, tool: Checked): Promise<void> {
   const faults = [
     ...metalFaults(tool),
+    ...termFaults(tool),
     ...(await numberFaults(work, tool)),
     ...(await ownerFaults(work, tool)),
   ];
@@ -102,6 +105,19 @@ function metalFaults({ kind, metal }: Checked): FieldFault[] {
     ];
   }
   return [];
+}
+
+function termFaults({ ownedBy, customerId, keptUntil, state }: Checked): FieldFault[] {
+  if (ownedBy === 'customer') {
+    const message = 'Choose the customer whose tool it is, or make it the shop’s own.';
+    return customerId === null ? [{ field: 'customerId', message }] : [];
+  }
+  if (state === 'returned') {
+    const message = 'It was given back, so it stays the customer’s own. Put it on the rack first.';
+    return [{ field: 'ownedBy', message }];
+  }
+  const message = 'Leave the day empty: only a customer’s own tool is kept for a term.';
+  return keptUntil === null ? [] : [{ field: 'keptUntil', message }];
 }
 
 async function numberFaults({ em }: Work, { id, kind, number }: Checked): Promise<FieldFault[]> {

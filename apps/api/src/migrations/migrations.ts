@@ -2,6 +2,7 @@ import { TheHouse } from './migration-20261201-the-house.ts';
 import { ThePresses } from './migration-20261201-the-presses.ts';
 import { TheSides } from './migration-20261201-the-sides.ts';
 import { TheTimeStudy } from './migration-20261201-the-time-study.ts';
+import { TheTools } from './migration-20261201-the-tools.ts';
 import { TheWorkings } from './migration-20261201-the-workings.ts';
 import { ThePhotos } from './migration-20261202-the-photos.ts';
 
@@ -11,6 +12,7 @@ export const migrations = [
   { name: 'migration-20261201-the-presses', class: ThePresses },
   { name: 'migration-20261201-the-sides', class: TheSides },
   { name: 'migration-20261201-the-time-study', class: TheTimeStudy },
+  { name: 'migration-20261201-the-tools', class: TheTools },
   { name: 'migration-20261201-the-workings', class: TheWorkings },
   { name: 'migration-20261202-the-photos', class: ThePhotos },
 ];

@@ -1,12 +1,13 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { Tool } from '../../modules/tools/tool.entity.ts';
 import { usesLeft } from '../../modules/tools/tool-ledger.ts';
-import { chooseTool, toolsFor } from '../choose-tools.ts';
+import { chooseTool, strikesFor, toolsFor } from '../choose-tools.ts';
 
 interface Asked {
   patternId: number;
   customerId: number;
-  strikes: number;
+  /** Pieces to cut. */
+  pieces: number;
   needsDie: boolean;
   needsPlate: boolean;
 }
@@ -29,18 +30,18 @@ export async function toolingForCheck(em: EntityManager, asked: Asked): Promise<
   const needed: NeededTool[] = [];
   for (const kind of kinds) {
     if (kind !== null)
-      needed.push(toolForCheck(kind, await toolsFor(em, kind, asked), asked.strikes));
+      needed.push(toolForCheck(kind, await toolsFor(em, kind, asked), asked.pieces));
   }
   return needed;
 }
 
-function toolForCheck(kind: Tool['kind'], tools: readonly Tool[], strikes: number): NeededTool {
-  const tool = chooseTool(tools, strikes);
+function toolForCheck(kind: Tool['kind'], tools: readonly Tool[], pieces: number): NeededTool {
+  const tool = chooseTool(tools, pieces);
   const word = kind === 'cutting die' ? 'Cutting die' : 'Stamp plate';
   return {
     name: tool === undefined ? word : `${word} ${tool.number}`,
     inShop: tool !== undefined,
-    strikesNeeded: strikes,
+    strikesNeeded: tool === undefined ? pieces : strikesFor(tool, pieces),
     strikesLeft: tool === undefined ? 0 : usesLeft(tool),
     remedy: tool === undefined ? bringIn(kind, tools) : '',
   };

@@ -31,6 +31,8 @@ async function check(quoteId: number, query = ''): Promise<RunCheck> {
 const answerAbout = (answers: CheckAnswer[], about: CheckAnswer['about']) =>
   answers.find((each) => each.about === about);
 
+const scrap = (id: number) => as('owner').post(`/api/tools/${id}/scrappings`).expect(201);
+
 async function changeTool(id: number, change: object): Promise<void> {
   const { version } = (await as('owner').get(`/api/tools/${id}`).expect(200)).body as {
     version: number;
@@ -94,7 +96,7 @@ describe('Can we make it?', () => {
 
   it('misses a plate that is on order, and one that is worn out', async () => {
     const quote = await agreedQuote(ready);
-    await changeTool(ready.plateId, { state: 'scrapped' });
+    await scrap(ready.plateId);
     const plate = {
       kind: 'stamp plate',
       name: 'Bramble',
@@ -122,7 +124,7 @@ describe('Can we make it?', () => {
 
   it('takes a run on awaiting tooling, and racks the plate when it is here', async () => {
     const quote = await agreedQuote(ready);
-    await changeTool(ready.plateId, { state: 'scrapped' });
+    await scrap(ready.plateId);
     const plate = {
       kind: 'stamp plate',
       name: 'Bramble',

@@ -6,9 +6,12 @@ import {
   listPatterns as listPatternsEndpoint,
   listPatternVersions,
   readPattern,
+  readToolingAdvice,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { adviseCut, type WorkedAdvice } from '../../flows/advice/advise-cut.ts';
+import { adviseCut } from '../../flows/advice/advise-cut.ts';
+import { adviseTooling } from '../../flows/advice/advise-tooling.ts';
 import { addPattern, changePattern } from '../../flows/save-pattern.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
@@ -84,6 +87,10 @@ export function patternRoutes(context: Context): Router {
       return advice;
     },
     ({ params, body }) => adviseCut(context, params.id, body),
+  );
+
+  serve(router, context, readToolingAdvice, (work, { params, query }) =>
+    adviseTooling(work, params.id, query),
   );
 
   return router;

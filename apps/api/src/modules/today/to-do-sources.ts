@@ -176,6 +176,23 @@ export const sources: Source[] = [
     }),
   },
   {
+    roles: ['owner'],
+    sql: `SELECT t.id, t.number, t.kind || ' ' || t.number AS title, c.name AS customer,
+        t.kept_until AS day, NULL AS extra
+      FROM tool t JOIN customer c ON c.id = t.customer_id
+      WHERE t.state = 'on the rack' AND t.owned_by = 'customer' AND t.kept_until <= :today
+      ORDER BY t.kept_until, t.id LIMIT 4`,
+    say: (row, today) => ({
+      kind: 'give back',
+      title: 'Give back or scrap',
+      detail: `${row.customer}’s own ${row.title}`,
+      when: by('kept until', row.day),
+      late: past(row.day, today),
+      action: 'Look',
+      to: `/pattern-room/tooling/${row.id}`,
+    }),
+  },
+  {
     roles: ['bookkeeper'],
     sql: `SELECT 0 AS id, '' AS number, '' AS title, '' AS customer,
         date(:today, 'start of month', '-1 month') AS day, date(:today, 'start of month', '-1 day') AS extra

@@ -5,7 +5,7 @@ import { AreaType, LengthType, MoneyType } from '../../db/columns/columns.ts';
 /** A cutting die or a stamp plate: what it cost, how much life it has, where it lives. */
 @Entity({ tableName: 'tool' })
 export class Tool {
-  [OptionalProps]?: 'metal' | 'used' | 'slot' | 'piecesPerStrike' | 'version';
+  [OptionalProps]?: 'metal' | 'used' | 'slot' | 'ownedBy' | 'piecesPerStrike' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -43,7 +43,14 @@ export class Tool {
   customerId: number | null = null;
 
   @Property({ type: 'text', columnType: 'text' })
-  state!: 'on the rack' | 'on order' | 'scrapped';
+  ownedBy: 'shop' | 'customer' = 'shop';
+
+  /** Of a customer's own: the last day on which the shop keeps it. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  keptUntil: string | null = null;
+
+  @Property({ type: 'text', columnType: 'text' })
+  state!: 'on the rack' | 'on order' | 'returned' | 'scrapped';
 
   /** How many pieces a die cuts at once. */
   @Property({ type: 'integer', columnType: 'integer' })

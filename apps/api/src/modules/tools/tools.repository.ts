@@ -6,6 +6,7 @@ import { Customer } from '../customers/customer.entity.ts';
 import { Job } from '../jobs/job.entity.ts';
 import { Pattern } from '../patterns/pattern.entity.ts';
 import { Impression } from './impression.entity.ts';
+import { isTermOver } from './tool-term.ts';
 import { usesLeft } from './tool-ledger.ts';
 import { Tool } from './tool.entity.ts';
 
@@ -34,7 +35,7 @@ export async function listTools({ em }: Work, wanted: Wanted): Promise<Tool[]> {
 }
 
 /** Tools with the names of what they belong to. */
-export async function describeTools({ em }: Work, tools: Tool[]): Promise<ToolReply[]> {
+export async function describeTools({ em, today }: Work, tools: Tool[]): Promise<ToolReply[]> {
   const patterns = await em.find(Pattern, {
     id: { $in: idsOf(tools.map((tool) => tool.patternId)) },
   });
@@ -56,6 +57,9 @@ export async function describeTools({ em }: Work, tools: Tool[]): Promise<ToolRe
     patternName: patterns.find(({ id }) => id === tool.patternId)?.name ?? null,
     customerId: tool.customerId,
     customerName: customers.find(({ id }) => id === tool.customerId)?.name ?? null,
+    ownedBy: tool.ownedBy,
+    keptUntil: tool.keptUntil,
+    termOver: isTermOver(tool, today),
     state: tool.state,
     piecesPerStrike: tool.piecesPerStrike,
     ruleThicknessMm: tool.ruleThicknessMm?.toString() ?? null,

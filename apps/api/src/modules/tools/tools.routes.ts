@@ -3,11 +3,14 @@ import {
   addImpressions as addImpressionsEndpoint,
   addTool as addToolEndpoint,
   changeTool as changeToolEndpoint,
+  giveBackTool,
   listImpressions as listImpressionsEndpoint,
   listTools as listToolsEndpoint,
   readTool,
+  scrapTool,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { endTool } from '../../flows/end-tool.ts';
 import { addTool, changeTool } from '../../flows/save-tool.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
@@ -49,6 +52,14 @@ export function toolRoutes(context: Context): Router {
 
   serve(router, context, changeToolEndpoint, async (work, { params, body, ifMatch }) =>
     describeTool(work, await changeTool(work, { id: params.id, ifMatch, change: body })),
+  );
+
+  serve(router, context, giveBackTool, async (work, { params }) =>
+    describeTool(work, await endTool(work, params.id, 'returned')),
+  );
+
+  serve(router, context, scrapTool, async (work, { params }) =>
+    describeTool(work, await endTool(work, params.id, 'scrapped')),
   );
 
   serve(router, context, listImpressionsEndpoint, async (work, { params, query }) => {

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { ToolReply } from '@hidewright/contract';
+import type { Today, ToolReply } from '@hidewright/contract';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { inTransaction, theProgram } from '../../work.ts';
 import { Impression } from './impression.entity.ts';
@@ -34,6 +34,8 @@ const change = (tool: ToolReply, body: object, version = tool.version) =>
   shop.as('owner').patch(`/api/tools/${tool.id}`).set('If-Match', `"${version}"`).send(body);
 const count = (tool: ToolReply, uses: number, reason = 'trial strikes') =>
   shop.as('maker').post(`/api/tools/${tool.id}/impressions`).send({ uses, reason });
+const end = (tool: ToolReply, how: 'returns' | 'scrappings') =>
+  shop.as('owner').post(`/api/tools/${tool.id}/${how}`).send({});
 const faultsOf = (body: { errors: { field: string }[] }) => body.errors.map(({ field }) => field);
 
 describe('a tool', () => {
@@ -71,11 +73,14 @@ describe('a tool', () => {
     const refused = await count(tool, 5).expect(409);
     expect(refused.body.allowed).toEqual(['on the rack']);
     const onRack = (await change(tool, { state: 'on the rack' }).expect(200)).body as ToolReply;
-    expect((await change(onRack, { state: 'on order' }).expect(409)).body.allowed).toEqual([
-      'scrapped',
-    ]);
-    const scrapped = (await change(onRack, { state: 'scrapped' }).expect(200)).body as ToolReply;
+    for (const state of ['on order', 'scrapped', 'returned']) {
+      expect((await change(onRack, { state }).expect(409)).body.allowed).toEqual([]);
+    }
+    const scrapped = (await end(tool, 'scrappings').expect(201)).body as ToolReply;
+    expect(scrapped.state).toBe('scrapped');
     expect((await change(scrapped, { state: 'on the rack' }).expect(409)).body.allowed).toEqual([]);
+    expect((await end(tool, 'scrappings').expect(409)).body.detail).toContain('scrapped already');
+    expect((await count(tool, 5).expect(409)).body.detail).toContain('Choose another one.');
   });
 
   it('is found by kind, state and words', async () => {
@@ -87,6 +92,72 @@ describe('a tool', () => {
     expect((await list('kind=cutting+die')).every(({ kind }) => kind === 'cutting die')).toBe(true);
     expect(await list('state=on+the+rack&q=oars')).toHaveLength(1);
     expect(await list('state=scrapped&q=oars')).toEqual([]);
+  });
+});
+
+describe('a customer’s own tool', () => {
+  let customerId: number;
+  beforeAll(async () => {
+    const customer = {
+      ...{ name: 'Brambling Brewery', contactName: 'The bar' },
+      ...{ email: 'bar@example.com', address: 'Maltings Lane' },
+    };
+    const { body } = await shop.as('owner').post('/api/customers').send(customer).expect(201);
+    customerId = body.id;
+  });
+
+  async function customersOwn(keptUntil: string | null): Promise<ToolReply> {
+    return add({ ...plate, ownedBy: 'customer', customerId, keptUntil });
+  }
+  const toDos = async (role: 'owner' | 'maker') =>
+    ((await shop.as(role).get('/api/today').expect(200)).body as Today).now.filter(
+      ({ kind }) => kind === 'give back',
+    );
+
+  it('is kept for its term, shows on the owner’s Today from the last day on, and is given back', async () => {
+    const tool = await customersOwn('2026-12-01');
+    const later = await customersOwn('2026-12-02');
+    expect([tool.termOver, later.termOver]).toEqual([true, false]);
+    expect(await toDos('owner')).toEqual([
+      expect.objectContaining({
+        title: 'Give back or scrap',
+        detail: `Brambling Brewery’s own stamp plate ${tool.number}`,
+        when: { word: 'kept until', day: '2026-12-01' },
+        late: false,
+        to: `/pattern-room/tooling/${tool.id}`,
+      }),
+    ]);
+    expect(await toDos('maker')).toEqual([]);
+    const back = (await end(tool, 'returns').expect(201)).body as ToolReply;
+    expect(back).toMatchObject({ state: 'returned', termOver: false });
+    expect(await toDos('owner')).toEqual([]);
+    const { body: log } = await shop.as('owner').get('/api/activities').expect(200);
+    expect(log.items[0]).toMatchObject({
+      action: `gave stamp plate ${tool.number}, Heron crest back to Brambling Brewery`,
+      actorName: 'The owner',
+    });
+    await end(tool, 'returns').expect(409);
+    const { body } = await change(back, { ownedBy: 'shop', keptUntil: null }).expect(422);
+    expect(faultsOf(body)).toEqual(['ownedBy']);
+    await change(back, { state: 'on the rack', keptUntil: null }).expect(200);
+    await end(later, 'scrappings').expect(201);
+  });
+
+  it('is given back by nobody but the owner, and the shop’s own by nobody', async () => {
+    const tool = await customersOwn(null);
+    await shop.as('maker').post(`/api/tools/${tool.id}/returns`).send({}).expect(403);
+    await shop.as('maker').post(`/api/tools/${tool.id}/scrappings`).send({}).expect(403);
+    const { body } = await end(await add(die), 'returns').expect(409);
+    expect(body.detail).toContain('is the shop’s own');
+    await shop.as('owner').post('/api/tools/987654/returns').send({}).expect(404);
+  });
+
+  it('becomes the shop’s own only without its term', async () => {
+    const tool = await customersOwn('2027-03-31');
+    expect(faultsOf((await change(tool, { ownedBy: 'shop' }).expect(422)).body)).toEqual([
+      'keptUntil',
+    ]);
+    await change(tool, { ownedBy: 'shop', keptUntil: null }).expect(200);
   });
 });
 
@@ -146,6 +217,10 @@ describe('a tool is refused', () => {
     ['a cost with three decimals', { ...die, cost: '1.005' }, 'cost'],
     ['a life of nothing', { ...die, lifeUses: 0 }, 'lifeUses'],
     ['a life of NaN', { ...die, lifeUses: Number.NaN }, 'lifeUses'],
+    ['a customer’s own of nobody', { ...die, ownedBy: 'customer' }, 'customerId'],
+    ['a term for the shop’s own', { ...die, keptUntil: '2027-01-31' }, 'keptUntil'],
+    ['a term that is no day', { ...die, keptUntil: 'spring' }, 'keptUntil'],
+    ['an owner of another sort', { ...die, ownedBy: 'a friend' }, 'ownedBy'],
     ['a plate without a metal', { ...plate, metal: '' }, 'metal'],
     ['a die of magnesium', { ...die, metal: 'magnesium' }, 'metal'],
     ['a plate of gold', { ...plate, metal: 'gold' }, 'metal'],

@@ -17,6 +17,7 @@ import { TaxRate } from '../../modules/tax-rates/tax-rate.entity.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import { inTransaction, theProgram, type Work } from '../../work.ts';
 import { Named, type DemoShop } from './demo-shop.ts';
+import { furnishPlateOffers } from './furnish-tooling.ts';
 import { customers } from './scenario/customers.ts';
 import { patterns } from './scenario/patterns.ts';
 import { demoPassword, people, shop as shopOf } from './scenario/people.ts';
@@ -77,6 +78,7 @@ async function furnishRooms(work: Work): Promise<Furnished> {
     const action = `added the press ${name}`;
     await logDeed(work, { action, subjectKind: 'press', subjectId: press.id });
   }
+  await furnishPlateOffers(work);
   for (const { supplier, ...each } of leathers) {
     const leather = work.em.create(Leather, {
       ...each,
@@ -163,6 +165,8 @@ async function furnishPattern(
       metal: 'steel',
       patternId: made.id,
       customerId: null,
+      ownedBy: 'shop',
+      keptUntil: null,
       state: 'on the rack',
       piecesPerStrike: 1,
       ruleThicknessMm: '1.05',

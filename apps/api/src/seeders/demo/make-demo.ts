@@ -9,6 +9,7 @@ import { dayIn } from '../../day-in.ts';
 import { SetClock, systemClock } from '../../outside/clock.ts';
 import { planPurchases } from './buy.ts';
 import { DemoShop } from './demo-shop.ts';
+import { planBorrowedPlate } from './furnish-tooling.ts';
 import { furnish } from './furnish.ts';
 import { planLocks } from './play-books.ts';
 import { planRun } from './play-run.ts';
@@ -43,6 +44,7 @@ async function playYear(config: Config): Promise<void> {
     const furnished = await furnish(shop);
     planPurchases(shop, year, furnished);
     for (const run of runs) planRun({ shop, year, furnished }, run);
+    planBorrowedPlate({ shop, year, furnished });
     planLocks(shop, year);
     year.plan(0, '06:00', async () => {
       await shop.as('owner', lapseQuotes);

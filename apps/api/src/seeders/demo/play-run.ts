@@ -149,6 +149,8 @@ async function orderPlate(
     slot: `C${plates + 1}`,
     patternId,
     customerId,
+    ownedBy: 'shop',
+    keptUntil: null,
     state: 'on order',
     piecesPerStrike: 1,
     ruleThicknessMm: null,

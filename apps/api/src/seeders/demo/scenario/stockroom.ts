@@ -44,6 +44,13 @@ export const presses = [
   },
 ] as const;
 
+/** What Kettlewell Engravers ask for a plate, and how long one lasts here. */
+export const plateOffers = [
+  { metal: 'magnesium', price: '46.00', lifeUses: 10_000 },
+  { metal: 'copper', price: '118.00', lifeUses: 50_000 },
+  { metal: 'brass', price: '310.00', lifeUses: 100_000 },
+] as const;
+
 export const leathers = [
   {
     name: 'Oak tan russet 5–6 oz',
