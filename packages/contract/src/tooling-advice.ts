@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
-import { id, idParams } from './fields.ts';
+import { idParams } from './fields.ts';
 import { tool, toolKinds } from './tools.ts';
 
 const pieces = (sentence: string) =>

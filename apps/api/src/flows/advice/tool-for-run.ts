@@ -1,5 +1,5 @@
 import type { ToolForRun } from '@hidewright/contract';
-import { describeTool } from '../../modules/tools/tools.repository.ts';
+import { describeTool } from '../../modules/tools/describe-tool.ts';
 import type { Tool } from '../../modules/tools/tool.entity.ts';
 import { usesLeft } from '../../modules/tools/tool-ledger.ts';
 import { moneyText } from '../../http/decimal-text.ts';

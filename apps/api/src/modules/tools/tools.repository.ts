@@ -1,13 +1,8 @@
 import type { FilterQuery } from '@mikro-orm/core';
-import type { ImpressionReply, ToolReply } from '@hidewright/contract';
-import { moneyText } from '../../http/decimal-text.ts';
+import type { ImpressionReply } from '@hidewright/contract';
 import type { Work } from '../../work.ts';
-import { Customer } from '../customers/customer.entity.ts';
 import { Job } from '../jobs/job.entity.ts';
-import { Pattern } from '../patterns/pattern.entity.ts';
 import { Impression } from './impression.entity.ts';
-import { isTermOver } from './tool-term.ts';
-import { usesLeft } from './tool-ledger.ts';
 import { Tool } from './tool.entity.ts';
 
 interface Wanted {
@@ -32,46 +27,6 @@ export async function listTools({ em }: Work, wanted: Wanted): Promise<Tool[]> {
       : { $or: [{ name: { $like: `%${q}%` } }, { number: q }, { slot: q }] }),
   };
   return em.find(Tool, where, { orderBy: { id: 'desc' }, limit: limit + 1 });
-}
-
-/** Tools with the names of what they belong to. */
-export async function describeTools({ em, today }: Work, tools: Tool[]): Promise<ToolReply[]> {
-  const patterns = await em.find(Pattern, {
-    id: { $in: idsOf(tools.map((tool) => tool.patternId)) },
-  });
-  const customers = await em.find(Customer, {
-    id: { $in: idsOf(tools.map((tool) => tool.customerId)) },
-  });
-  return tools.map((tool) => ({
-    id: tool.id,
-    number: tool.number,
-    kind: tool.kind,
-    name: tool.name,
-    metal: tool.metal,
-    cost: moneyText(tool.cost),
-    lifeUses: tool.lifeUses,
-    used: tool.used,
-    usesLeft: usesLeft(tool),
-    slot: tool.slot,
-    patternId: tool.patternId,
-    patternName: patterns.find(({ id }) => id === tool.patternId)?.name ?? null,
-    customerId: tool.customerId,
-    customerName: customers.find(({ id }) => id === tool.customerId)?.name ?? null,
-    ownedBy: tool.ownedBy,
-    keptUntil: tool.keptUntil,
-    termOver: isTermOver(tool, today),
-    state: tool.state,
-    piecesPerStrike: tool.piecesPerStrike,
-    ruleThicknessMm: tool.ruleThicknessMm?.toString() ?? null,
-    borderMm: tool.borderMm?.toString() ?? null,
-    reliefAreaMm2: tool.reliefAreaMm2?.toString() ?? null,
-    version: tool.version,
-  }));
-}
-
-export async function describeTool(work: Work, tool: Tool): Promise<ToolReply> {
-  const [described] = await describeTools(work, [tool]);
-  return described as ToolReply;
 }
 
 /** What a tool did, newest first, one row more than a page. */

@@ -15,15 +15,10 @@ import { addTool, changeTool } from '../../flows/save-tool.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
 import { logDeed } from '../activity/activity-log.ts';
+import { describeTool, describeTools } from './describe-tool.ts';
 import { findTool } from './find-tool.ts';
 import { addImpressions } from './tool-ledger.ts';
-import {
-  describeImpressions,
-  describeTool,
-  describeTools,
-  listImpressions,
-  listTools,
-} from './tools.repository.ts';
+import { describeImpressions, listImpressions, listTools } from './tools.repository.ts';
 
 export function toolRoutes(context: Context): Router {
   const router = Router();
