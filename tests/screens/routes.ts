@@ -115,6 +115,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner', 'maker'],
   },
   {
+    name: 'tooling-for',
+    list: '/patterns',
+    page: (id) => `/pattern-room/patterns/${id}/tooling?pieces=500&runs=3`,
+    roles: ['owner'],
+  },
+  {
     name: 'pattern-change',
     list: '/patterns',
     page: (id) => `/pattern-room/patterns/${id}/change`,

@@ -34,6 +34,7 @@ export const stateLooks: Readonly<Record<string, Look>> = {
   credited: ['dash', 'quiet'],
   'on the rack': ['full', 'act'],
   'on order': ['wait', 'info'],
+  returned: ['arrow', 'quiet'],
   scrapped: ['cross', 'quiet'],
   'in use': ['check', 'act'],
   'put away': ['dash', 'quiet'],

@@ -39,6 +39,11 @@ export const patternRoomRoutes: RouteObject[] = [
             lazy: () => import('./pattern-room/time-step.tsx'),
           },
           {
+            path: ':id/tooling',
+            handle: { crumb: nameOf },
+            lazy: () => import('./pattern-room/tooling-for.tsx'),
+          },
+          {
             path: ':id/change',
             handle: { crumb: nameOf },
             lazy: () => import('./pattern-room/change-pattern.tsx'),

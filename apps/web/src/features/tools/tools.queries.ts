@@ -2,10 +2,12 @@ import {
   listCustomers,
   listImpressions,
   listPatterns,
+  listPlateOffers,
   listTools,
   readTool,
+  readToolingAdvice,
 } from '@hidewright/contract';
-import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
+import { infiniteQueryOptions, keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
 /** Cutting dies and stamp plates, of one pattern or all of them; one page holds what a small shop's rack does. */
@@ -53,5 +55,32 @@ export function customerChoicesQuery() {
     queryKey: ['tools', 'customer-choices'],
     queryFn: ({ signal }) => call(listCustomers, { query: { limit: 200 }, signal }),
     select: ({ items }) => items.map(({ id, name }) => ({ value: id, label: name })),
+  });
+}
+
+/** What a new plate of each metal costs and lasts. */
+export function plateOffersQuery() {
+  return queryOptions({
+    queryKey: ['tools', 'plate-offers'],
+    queryFn: ({ signal }) => call(listPlateOffers, { signal }),
+  });
+}
+
+export interface AskedTooling {
+  patternId: number;
+  customerId?: number | undefined;
+  /** To cut, rejects included. */
+  pieces: number;
+  /** Expected after this one, and the pieces of each. */
+  runs?: number | undefined;
+  runPieces?: number | undefined;
+}
+
+/** The die and plate there are for a run, and which metal a new plate should be. */
+export function toolingAdviceQuery({ patternId, ...query }: AskedTooling) {
+  return queryOptions({
+    queryKey: ['tools', 'advice', patternId, query],
+    queryFn: ({ signal }) => call(readToolingAdvice, { params: { id: patternId }, query, signal }),
+    placeholderData: keepPreviousData,
   });
 }

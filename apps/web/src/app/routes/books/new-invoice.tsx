@@ -101,7 +101,7 @@ function WhatIsInvoiced({ order }: { order: OrderToInvoice }) {
           {
             word: `Before tax, ${currency}`,
             figure: moneyText(order.total),
-            note: 'as agreed, with tooling',
+            note: 'as agreed, with tooling where it was charged',
           },
         ]}
       />

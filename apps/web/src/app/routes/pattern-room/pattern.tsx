@@ -106,7 +106,10 @@ function Tooling({ pattern, isOwner }: { pattern: Pattern; isOwner: boolean }) {
       title="Tooling for it"
       aside={
         isOwner && (
-          <TextLink to={`/pattern-room/tooling/new?pattern=${pattern.id}`}>Add a tool</TextLink>
+          <span className="flex flex-wrap gap-x-4">
+            <TextLink to={`/pattern-room/patterns/${pattern.id}/tooling`}>Does it last?</TextLink>
+            <TextLink to={`/pattern-room/tooling/new?pattern=${pattern.id}`}>Add a tool</TextLink>
+          </span>
         )
       }
     >

@@ -16,7 +16,7 @@ export function PressCard({ pattern }: { pattern: Pattern }) {
   const inUse = (presses?.items ?? []).filter(({ active }) => active);
   const { outline } = pattern.definition;
   if (outline === null || inUse.length === 0 || tools === undefined) return null;
-  const kept = tools.items.filter(({ state }) => state !== 'scrapped');
+  const kept = tools.items.filter(({ state }) => state === 'on the rack' || state === 'on order');
   const die = kept.find(({ kind }) => kind === 'cutting die');
   const plates = kept.filter(({ kind }) => kind === 'stamp plate');
   const relief = largest(plates.map(({ reliefAreaMm2 }) => reliefAreaMm2));

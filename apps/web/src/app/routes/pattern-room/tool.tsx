@@ -3,6 +3,7 @@ import { useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { KeyFigures } from '../../../components/key-figures.tsx';
+import { Notice } from '../../../components/notice.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
@@ -10,11 +11,13 @@ import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { ChangeToolForm } from '../../../features/tools/components/change-tool-form.tsx';
 import { CountForm } from '../../../features/tools/components/count-form.tsx';
 import { ImpressionsList } from '../../../features/tools/components/impressions-list.tsx';
+import { ToolActs } from '../../../features/tools/components/tool-acts.tsx';
 import { Wear } from '../../../features/tools/components/wear.tsx';
-import { toolTitle, usesWord } from '../../../features/tools/tool-words.ts';
+import { ownerText, toolTitle, usesWord } from '../../../features/tools/tool-words.ts';
 import { toolQuery } from '../../../features/tools/tools.queries.ts';
 import { countText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
 
 export async function loader({ params }: LoaderFunctionArgs) {
   return queryClient.ensureQueryData(toolQuery(Number(params['id'])));
@@ -24,20 +27,27 @@ export function Component() {
   const { id } = useLoaderData<ToolReply>();
   const { data: tool } = useSuspenseQuery(toolQuery(id));
   const { data: session } = useSuspenseQuery(sessionQuery());
+  const isOwner = session.person?.role === 'owner';
   return (
     <>
       <PageHeader
         title={`${toolTitle(tool)}, ${tool.name}`}
         subtitle={<StateMark state={tool.state} />}
+        action={isOwner ? <ToolActs tool={tool} /> : undefined}
       />
+      {tool.termOver && (
+        <Notice tone="attention" className="mb-5" title="Its term is over.">
+          {`It is ${tool.customerName ?? 'the customer'}’s own: give it back, scrap it, or agree on a later day below.`}
+        </Notice>
+      )}
       <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
         <div className="grid gap-5">
           <Card title="Wear and place">
             <Facts tool={tool} />
           </Card>
-          {session.person?.role === 'owner' && (
+          {isOwner && (
             <Card title="Change it">
-              <ChangeToolForm key={tool.id} tool={tool} />
+              <ChangeToolForm key={`${tool.id} ${tool.state}`} tool={tool} />
             </Card>
           )}
         </div>
@@ -60,6 +70,7 @@ export function Component() {
 }
 
 function Facts({ tool }: { tool: ToolReply }) {
+  const { today } = useWorkshop();
   const given = (text: string | null) => (text === null || text === '' ? '–' : text);
   return (
     <KeyFigures
@@ -70,6 +81,7 @@ function Facts({ tool }: { tool: ToolReply }) {
         { word: 'metal', figure: given(tool.metal) },
         { word: 'pattern', figure: given(tool.patternName) },
         { word: 'customer', figure: given(tool.customerName) },
+        { word: 'whose', figure: ownerText(tool, today) },
       ]}
     />
   );

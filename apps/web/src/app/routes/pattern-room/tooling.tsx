@@ -1,11 +1,14 @@
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
+import { Card } from '../../../components/card.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
+import { Skeleton } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
+import { PlateOffers } from '../../../features/tools/components/plate-offers.tsx';
 import { ToolsTable } from '../../../features/tools/components/tools-table.tsx';
-import { toolsQuery } from '../../../features/tools/tools.queries.ts';
+import { plateOffersQuery, toolsQuery } from '../../../features/tools/tools.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { PatternRoomNav } from './pattern-room-nav.tsx';
 
@@ -17,12 +20,12 @@ export async function loader() {
 export function Component() {
   const { data: session } = useSuspenseQuery(sessionQuery());
   const { data: tools } = useSuspenseQuery(toolsQuery());
-  const add =
-    session.person?.role === 'owner' ? (
-      <LinkButton to="/pattern-room/tooling/new" tone="primary">
-        New tool
-      </LinkButton>
-    ) : undefined;
+  const isOwner = session.person?.role === 'owner';
+  const add = isOwner ? (
+    <LinkButton to="/pattern-room/tooling/new" tone="primary">
+      New tool
+    </LinkButton>
+  ) : undefined;
   return (
     <>
       <PageHeader title="Tooling" action={add} />
@@ -36,7 +39,22 @@ export function Component() {
           </EmptyState>
         }
       />
+      {isOwner && <NewPlates />}
     </>
+  );
+}
+
+/** Prices are the owner's alone. */
+function NewPlates() {
+  const { data } = useQuery(plateOffersQuery());
+  return (
+    <Card
+      className="mt-5"
+      title="New plates"
+      subtitle="What one costs and lasts, by metal: your own figures"
+    >
+      {data ? <PlateOffers offers={data.items} /> : <Skeleton />}
+    </Card>
   );
 }
 

@@ -42,8 +42,10 @@ function toolsAndLot(job: Job): ReactNode[] {
   );
   const parts: ReactNode[] = [];
   if (job.needsPlate) parts.push(named('plate', plate?.number ?? 'not here yet'));
+  if (plate?.lifeLeft === 0) parts.push(noLife('plate'));
   if (plate && plate.slot !== '') parts.push(named('slot', plate.slot));
   if (job.needsDie) parts.push(named('die', die?.number ?? 'not here yet'));
+  if (die?.lifeLeft === 0) parts.push(noLife('die'));
   if (die && die.slot !== '' && die.slot !== plate?.slot) parts.push(named('slot', die.slot));
   parts.push(
     named(own.length > 1 ? 'lots' : 'lot', own.map(({ tag }) => tag).join(', ') || 'none held'),
@@ -66,6 +68,14 @@ function named(word: string, figure: string, unit = ''): ReactNode {
       {word} <strong>{figure}</strong>
       {unit && ` ${unit}`}
     </span>
+  );
+}
+
+function noLife(word: string): ReactNode {
+  return (
+    <strong key={`life of the ${word}`} className="whitespace-nowrap text-oxblood">
+      {`${word} has no life left`}
+    </strong>
   );
 }
 

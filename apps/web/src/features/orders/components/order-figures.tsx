@@ -24,11 +24,18 @@ export function OrderFigures({ order }: { order: Order }) {
         figures={[
           { word: 'Price each', figure: unitPriceText(priceEach) },
           { word: `${countText(order.quantity)} pieces`, figure: moneyText(goodsTotal) },
-          { word: 'Tooling, once', figure: moneyText(toolingCharge) },
+          toolingFigure(toolingCharge),
           ...charges.map(({ name, amount }) => ({ word: name, figure: moneyText(amount) })),
           { word: 'Total', figure: moneyText(total) },
         ]}
       />
     </Card>
   );
+}
+
+/** A reorder has no tooling to pay: said, so that a nought does not look forgotten. */
+function toolingFigure(charge: string) {
+  if (Number(charge) > 0)
+    return { word: 'Tooling', figure: moneyText(charge), note: 'charged once' };
+  return { word: 'Tooling', figure: 'none', note: 'nothing new was made for it' };
 }

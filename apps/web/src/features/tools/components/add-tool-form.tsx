@@ -3,6 +3,7 @@ import { useWatch } from 'react-hook-form';
 import { Form } from '../../../components/form.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
 import { useAddTool } from '../tools.mutations.ts';
+import { ofItsOwner } from '../typed-tool.ts';
 import { ToolFields } from './tool-fields.tsx';
 
 const kinds = [
@@ -30,6 +31,8 @@ export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
         slot: '',
         patternId,
         customerId: null,
+        ownedBy: 'shop',
+        keptUntil: null,
         state: 'on the rack',
         piecesPerStrike: 1,
         ruleThicknessMm: null,
@@ -38,7 +41,9 @@ export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
       }}
       submitWord="Add the tool"
       draftKey="tool-new"
-      onSend={async (body) => onAdded(await send.mutateAsync({ body: ofItsKind(body) }))}
+      onSend={async (body) =>
+        onAdded(await send.mutateAsync({ body: ofItsOwner(ofItsKind(body)) }))
+      }
     >
       <RadioCards name="kind" label="Kind" cards={kinds} across />
       <FieldsOfKind />
@@ -47,12 +52,12 @@ export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
 }
 
 function FieldsOfKind() {
-  return <ToolFields kind={useWatch({ name: 'kind' }) as ToolReply['kind']} isNew />;
+  return <ToolFields kind={useWatch({ name: 'kind' }) as ToolReply['kind']} />;
 }
 
 /** What was chosen for a plate before it became a die is not sent. */
 function ofItsKind<Body extends { kind: ToolReply['kind'] }>(body: Body): Body {
   return body.kind === 'cutting die'
-    ? { ...body, metal: '', customerId: null, borderMm: null, reliefAreaMm2: null }
+    ? { ...body, metal: '', borderMm: null, reliefAreaMm2: null }
     : { ...body, piecesPerStrike: 1, ruleThicknessMm: null };
 }

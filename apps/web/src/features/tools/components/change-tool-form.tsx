@@ -6,6 +6,7 @@ import { call } from '../../../lib/api.ts';
 import { useChangeTool } from '../tools.mutations.ts';
 import { toolQuery } from '../tools.queries.ts';
 import { toolTitle } from '../tool-words.ts';
+import { ofItsOwner } from '../typed-tool.ts';
 import { ToolFields } from './tool-fields.tsx';
 
 export function ChangeToolForm({ tool }: { tool: ToolReply }) {
@@ -28,21 +29,20 @@ export function ChangeToolForm({ tool }: { tool: ToolReply }) {
       onReload={reload}
       onSend={async (body) => {
         const ifMatch = client.getQueryData<ToolReply>(queryKey)?.version ?? tool.version;
-        say(
-          `${toolTitle(await send.mutateAsync({ params: { id: tool.id }, body, ifMatch }))} is saved.`,
-        );
+        const change = { params: { id: tool.id }, body: ofItsOwner(body), ifMatch };
+        say(`${toolTitle(await send.mutateAsync(change))} is saved.`);
       }}
     >
-      <ToolFields kind={tool.kind} />
+      <ToolFields kind={tool.kind} from={tool.state} />
     </Form>
   );
 }
 
 function typedOf(tool: ToolReply) {
   const { name, number, metal, cost, lifeUses, slot, patternId, customerId, state } = tool;
-  const { piecesPerStrike, ruleThicknessMm, borderMm, reliefAreaMm2 } = tool;
+  const { ownedBy, keptUntil, piecesPerStrike, ruleThicknessMm, borderMm, reliefAreaMm2 } = tool;
   return {
     ...{ name, number, metal, cost, lifeUses, slot, patternId, customerId, state },
-    ...{ piecesPerStrike, ruleThicknessMm, borderMm, reliefAreaMm2 },
+    ...{ ownedBy, keptUntil, piecesPerStrike, ruleThicknessMm, borderMm, reliefAreaMm2 },
   };
 }

@@ -1,4 +1,4 @@
-import { plateMetals, toolStates, type ToolReply } from '@hidewright/contract';
+import { plateMetals, type ToolReply } from '@hidewright/contract';
 import { useQuery } from '@tanstack/react-query';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { LengthField } from '../../../components/length-field.tsx';
@@ -6,22 +6,22 @@ import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
-import { customerChoicesQuery, patternChoicesQuery } from '../tools.queries.ts';
-import { usesWord } from '../tool-words.ts';
+import { patternChoicesQuery } from '../tools.queries.ts';
+import { statesFor, usesWord } from '../tool-words.ts';
+import { OwnerFields } from './owner-fields.tsx';
 
 const metals = plateMetals.map((metal) => ({ value: metal, label: metal }));
-const states = toolStates.map((state) => ({ value: state, label: state }));
 
 interface ToolFieldsProps {
   kind: ToolReply['kind'];
-  /** A new one may leave its number to the program. */
-  isNew?: boolean;
+  /** The state it is in; a new one, which may leave its number to the program, is in none yet. */
+  from?: ToolReply['state'];
 }
 
 /** What a cutting die or stamp plate is, cost, and where it lives. */
-export function ToolFields({ kind, isNew = false }: ToolFieldsProps) {
+export function ToolFields({ kind, from }: ToolFieldsProps) {
+  const isNew = from === undefined;
   const { data: patterns = [] } = useQuery(patternChoicesQuery());
-  const { data: customers = [] } = useQuery(customerChoicesQuery());
   const isPlate = kind === 'stamp plate';
   return (
     <>
@@ -71,19 +71,14 @@ export function ToolFields({ kind, isNew = false }: ToolFieldsProps) {
         whenEmpty="null"
         choices={patterns}
       />
-      {isPlate && (
-        <SelectField
-          key={`customers ${customers.length}`}
-          name="customerId"
-          label="Customer"
-          optional
-          placeholder="Nobody in particular"
-          whenEmpty="null"
-          choices={customers}
-        />
-      )}
+      <OwnerFields />
       {isPlate ? <PlateMeasures /> : <DieMeasures />}
-      <SelectField name="state" label="State" choices={states} short />
+      <SelectField
+        name="state"
+        label="State"
+        choices={statesFor(from).map((state) => ({ value: state, label: state }))}
+        short
+      />
     </>
   );
 }

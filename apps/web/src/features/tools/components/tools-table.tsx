@@ -4,7 +4,8 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { toolTitle } from '../tool-words.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { ownerText, toolTitle } from '../tool-words.ts';
 import { Wear } from './wear.tsx';
 
 const columns: Column<ToolReply>[] = [
@@ -21,11 +22,18 @@ const columns: Column<ToolReply>[] = [
     onPhone: 'title',
   },
   { id: 'slot', header: 'Slot', value: (row) => row.slot },
-  { id: 'metal', header: 'Metal', value: (row) => row.metal, onPhone: 'hidden' },
+  {
+    id: 'metal',
+    header: 'Metal',
+    value: (row) => row.metal,
+    cell: (row) => <span className="whitespace-nowrap">{row.metal}</span>,
+    onPhone: 'hidden',
+  },
   {
     id: 'for',
     header: 'For',
     value: (row) => [row.patternName, row.customerName].filter(Boolean).join(', '),
+    cell: (row) => <ForWhom tool={row} />,
   },
   {
     id: 'used',
@@ -38,9 +46,26 @@ const columns: Column<ToolReply>[] = [
     id: 'state',
     header: 'State',
     value: (row) => row.state,
-    cell: (row) => <StateMark state={row.state} />,
+    cell: (row) => (
+      <span className="inline-flex flex-wrap gap-1">
+        <StateMark state={row.state} />
+        {row.termOver && <StateMark state="lapsed">term over</StateMark>}
+      </span>
+    ),
   },
 ];
+
+function ForWhom({ tool }: { tool: ToolReply }) {
+  const { today } = useWorkshop();
+  return (
+    <span className="block text-left">
+      {[tool.patternName, tool.customerName].filter(Boolean).join(', ')}
+      {tool.ownedBy === 'customer' && (
+        <span className="block text-sm text-ink-soft">{ownerText(tool, today)}</span>
+      )}
+    </span>
+  );
+}
 
 const briefColumns = columns.filter(({ id }) => id !== 'for' && id !== 'metal');
 

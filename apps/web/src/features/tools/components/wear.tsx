@@ -15,7 +15,7 @@ export function Wear({ tool }: { tool: ToolReply }) {
       <span className="mt-0.5 block text-sm">
         {wearText(tool)} {usesWord(tool.kind)}
         {tool.usesLeft === 0 && (
-          <span className="block font-semibold text-brass">beyond its expected life</span>
+          <span className="block font-semibold text-brass">no life left</span>
         )}
       </span>
     </span>
