@@ -19,6 +19,7 @@ import { rungAt } from '../../../features/quotes/components/quote-preview.tsx';
 import { QuoteTicket } from '../../../features/quotes/components/quote-ticket.tsx';
 import { quoteQuery } from '../../../features/quotes/quotes.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
+import { ToolingThere } from '../../../features/tools/components/tooling-there.tsx';
 import { queryClient } from '../../../lib/query-client.ts';
 import { AcceptRun } from './accept-run.tsx';
 
@@ -74,6 +75,13 @@ export function Component() {
             <TextLink to={`/counter/quotes/${quote.id}/workings?${workingsOf(quantity, option)}`}>
               All workings: hours, costs, what to cut, what if
             </TextLink>
+          )}
+          {isOwner && rung && ['draft', 'sent'].includes(quote.state) && (
+            <ToolingThere
+              patternId={quote.patternId}
+              customerId={quote.customerId}
+              pieces={rung.cutCount}
+            />
           )}
         </div>
         <div className="space-y-5 lg:col-span-2 xl:col-span-1">
