@@ -1,13 +1,13 @@
-import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { ToolForRun, ToolingAdviceReply } from '@hidewright/contract';
 import { readyForTheBench, type BenchShop } from '../../testing/bench-shop.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 
 let ready: BenchShop;
-beforeEach(async () => {
+const open = async () => {
   ready = await readyForTheBench(await startTestShop());
-});
-afterEach(() => ready.shop.close());
+};
+const close = () => ready.shop.close();
 
 const owner = () => ready.shop.as('owner');
 
@@ -32,6 +32,9 @@ async function offerTwo(): Promise<void> {
 }
 
 describe('advice on tooling', () => {
+  beforeEach(open);
+  afterEach(close);
+
   it('names the die and the plate that are there, with what they have left', async () => {
     const advice = await advise({});
     expect(about(advice, 'cutting die')).toMatchObject({
@@ -119,6 +122,11 @@ describe('advice on tooling', () => {
     await owner().post('/api/tools').send(ordered).expect(201);
     expect(about(await advise({}), 'stamp plate')).toMatchObject({ tool: null, onOrder: '77' });
   });
+});
+
+describe('what is asked', () => {
+  beforeAll(open);
+  afterAll(close);
 
   it.each([
     ['pieces', 'pieces=0'],
