@@ -111,6 +111,8 @@ export * from './promise/bench-plan.ts';
 export * from './promise/late-jobs.ts';
 export * from './promise/two-machine.ts';
 
+export * from './plan/machine-pays.ts';
+
 export * from './compare/compare-run.ts';
 export * from './compare/bought-variances.ts';
 export * from './compare/time-variances.ts';

@@ -53,7 +53,14 @@ export const patternRoomRoutes: RouteObject[] = [
       {
         path: 'presses',
         handle: { crumb: 'Presses' },
-        lazy: () => import('./pattern-room/presses.tsx'),
+        children: [
+          { index: true, lazy: () => import('./pattern-room/presses.tsx') },
+          {
+            path: 'pays',
+            handle: { crumb: 'Does the machine pay?' },
+            lazy: () => import('./pattern-room/machine-pays.tsx'),
+          },
+        ],
       },
       {
         path: 'tooling',

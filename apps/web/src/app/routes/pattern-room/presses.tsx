@@ -1,6 +1,7 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Card } from '../../../components/card.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { say } from '../../../components/toast.ts';
@@ -22,7 +23,13 @@ export function Component() {
   const isOwner = session.person?.role === 'owner';
   return (
     <>
-      <PageHeader title="Presses" subtitle="What goes in, and what one strike manages" />
+      <PageHeader
+        title="Presses"
+        subtitle="What goes in, and what one strike manages"
+        action={
+          isOwner && <LinkButton to="/pattern-room/presses/pays">Does the machine pay?</LinkButton>
+        }
+      />
       <PatternRoomNav />
       <div className={isOwner ? 'grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_24rem]' : ''}>
         <PressesTable
