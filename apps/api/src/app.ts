@@ -38,6 +38,7 @@ import { timeReadingRoutes } from './modules/time-readings/time-readings.routes.
 import { todayRoutes } from './modules/today/today.routes.ts';
 import { plateOfferRoutes } from './modules/tools/plate-offers.routes.ts';
 import { toolRoutes } from './modules/tools/tools.routes.ts';
+import { weekMixRoutes } from './modules/week-mixes/week-mixes.routes.ts';
 import { workshopRoutes } from './modules/workshop/workshop.routes.ts';
 import { sessionRoutes } from './modules/session/session.routes.ts';
 import { systemRoutes } from './modules/system/system.routes.ts';
@@ -73,6 +74,7 @@ const rooms: ((context: Context) => Router)[] = [
   invoiceRoutes,
   taxRateRoutes,
   periodRoutes,
+  weekMixRoutes,
 ];
 
 const web = fileURLToPath(new URL('../../web/dist', import.meta.url));

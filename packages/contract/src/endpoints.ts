@@ -32,6 +32,7 @@ import * as today from './today.ts';
 import * as toolingAdvice from './tooling-advice.ts';
 import * as tools from './tools.ts';
 import * as variances from './variances.ts';
+import * as weekMixes from './week-mixes.ts';
 import * as workshop from './workshop.ts';
 
 const rooms: Record<string, unknown>[] = [
@@ -58,6 +59,7 @@ const rooms: Record<string, unknown>[] = [
   jobs,
   variances,
   benchHours,
+  weekMixes,
   leathers,
   lots,
   lotPhotos,

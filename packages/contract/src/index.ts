@@ -39,6 +39,7 @@ export * from './today.ts';
 export * from './tooling-advice.ts';
 export * from './tools.ts';
 export * from './variances.ts';
+export * from './week-mixes.ts';
 export * from './work-plan.ts';
 export * from './workshop.ts';
 export * from './run-as-asked.ts';

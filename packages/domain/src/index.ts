@@ -112,6 +112,9 @@ export * from './promise/late-jobs.ts';
 export * from './promise/two-machine.ts';
 
 export * from './plan/machine-pays.ts';
+export * from './plan/linear-programme.ts';
+export type * from './plan/week.ts';
+export { weekMix } from './plan/week-mix.ts';
 
 export * from './compare/compare-run.ts';
 export * from './compare/bought-variances.ts';
