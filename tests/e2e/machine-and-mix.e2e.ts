@@ -1,4 +1,4 @@
-import { afterAll, beforeAll } from 'vitest';
+import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
 import { keyboardAlone } from '../support/hands.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
@@ -42,3 +42,42 @@ walk('whether a press pays is answered while it is typed', async ({ page }) => {
     .waitFor();
   await expectAccessible(page);
 });
+
+walk(
+  'a week’s mix says what one more hour is worth and what stays for large pieces',
+  async ({ page }) => {
+    await signInAs(page, hidewright.url, 'owner');
+    await visit(page, `${hidewright.url}/bench`);
+    await page.getByRole('link', { name: 'A week’s mix' }).click();
+    await page.getByText(/^begins with \d+ finished runs/).waitFor();
+    await expectAccessible(page);
+    await keyboardAlone.press(page.getByRole('button', { name: 'Work it out' }));
+    await page.getByText(/^One more bench hour would leave/).waitFor();
+    await expectAccessible(page);
+
+    await page.getByRole('button', { name: 'A large piece' }).click();
+    const piece = page.getByRole('group', { name: 'The work' }).getByRole('listitem').last();
+    await piece.getByRole('textbox', { name: /^Work/ }).fill('Weekend bag');
+    await piece.getByLabel(/^Left/).fill('480');
+    await piece.getByLabel('Bench, min').fill('900');
+    await page.getByLabel('Income the shop needs a week').fill('100');
+    await page.getByRole('button', { name: 'Work it out' }).click();
+    await page.getByText(/Up to .* h of the week can go to large pieces/).waitFor();
+    await page.getByRole('row', { name: /Weekend bag/ }).waitFor();
+    await page.setViewportSize(phone);
+    await expectAccessible(page);
+    await page.reload();
+    await page.getByRole('button', { name: 'Work it out' }).waitFor();
+    await expect
+      .poll(() => piece.getByRole('textbox', { name: /^Work/ }).inputValue())
+      .toBe('Weekend bag');
+
+    await piece.getByLabel('Promised').fill('30');
+    await page.getByRole('button', { name: 'Work it out' }).click();
+    await page
+      .getByText(/Promise less, first of all Weekend bag/)
+      .first()
+      .waitFor();
+    await expectAccessible(page);
+  },
+);

@@ -8,6 +8,11 @@ export const benchRoutes: RouteObject[] = [
     handle: { crumb: 'Bench' },
     children: [
       { index: true, lazy: () => import('./bench/index.tsx') },
+      {
+        path: 'week-mix',
+        handle: { crumb: 'A week’s mix' },
+        lazy: () => import('./bench/week-mix.tsx'),
+      },
       { path: 'jobs/:id', handle: { crumb: numberOf }, lazy: () => import('./bench/job.tsx') },
       {
         path: 'checks/:id',

@@ -42,6 +42,6 @@ function upkeepWords({ upkeepPerMonth }: MachinePays): string {
 
 function runsWords({ runsPerMonth }: TypedMachine, { runsToPay }: MachinePays): string {
   if (runsToPay === null) return 'It saves nothing on a run, so no number of runs pays for it.';
-  const asked = `It pays from ${numberText(runsToPay, 1)} runs a month`;
+  const asked = `It pays from ${numberText(runsToPay, 1)} ${runsToPay === '1' ? 'run' : 'runs'} a month`;
   return `${asked}; you have ${numberText(runsPerMonth, 2)}.`;
 }

@@ -38,7 +38,11 @@ export function Component() {
   const isOwner = session.person?.role === 'owner';
   return (
     <>
-      <PageHeader title="Bench" subtitle="What to make next, and what it takes" />
+      <PageHeader
+        title="Bench"
+        subtitle="What to make next, and what it takes"
+        action={isOwner && <LinkButton to="/bench/week-mix">A week’s mix</LinkButton>}
+      />
       <div className="grid items-start gap-6 xl:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
         <div>
           {open.items.length === 0 && <NoTickets isOwner={isOwner} />}

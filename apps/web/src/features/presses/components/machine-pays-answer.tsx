@@ -40,8 +40,8 @@ function Answer({ typed, pays }: { typed: TypedMachine; pays: MachinePays }) {
               note: hoursAndMinutes(pays.minutesSavedPerMonth),
             },
             {
-              word: 'paid back',
-              figure: paybackMonths === null ? 'never' : `after ${monthsText(paybackMonths)}`,
+              word: paybackMonths === null ? 'paid back' : 'paid back after',
+              figure: paybackMonths === null ? 'never' : monthsText(paybackMonths),
               note: 'upkeep paid',
             },
             {
