@@ -11,6 +11,7 @@ import { TextArea } from '../../../components/text-area.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { useChangeWorkshop } from '../office.mutations.ts';
+import { ChargesFields, RatesFields } from './rates-fields.tsx';
 
 const areaUnits = [
   { value: 'ft2', label: 'square feet (ft²)' },
@@ -84,6 +85,7 @@ export function WorkshopForm({
         unit="h"
         help="All hands together, desk time taken off."
       />
+      <RatesFields />
       <Stitch />
       <h2>Starting values of a pattern</h2>
       <DecimalField
@@ -111,6 +113,7 @@ export function WorkshopForm({
       <NumberField name="quoteValidDays" label="A quote holds for" unit="days" />
       <NumberField name="paymentTermDays" label="Payment within" unit="days" />
       <TextField name="taxNumber" label="Tax number" short optional />
+      <ChargesFields />
     </Form>
   );
 }
