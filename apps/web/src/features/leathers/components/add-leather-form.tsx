@@ -13,6 +13,9 @@ const blank = {
   colour: '',
   finish: '',
   supplierId: null,
+  wholeForm: null,
+  wholeAreaMm2: null,
+  wholeUsablePercent: '85',
 };
 
 interface AddLeatherFormProps {

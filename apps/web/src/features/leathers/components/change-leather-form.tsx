@@ -44,18 +44,20 @@ export function ChangeLeatherForm({ leather, suppliers }: ChangeLeatherFormProps
   );
 }
 
+/** What the form asks for, from what is known of the leather now. */
 function typedOf(leather: Leather) {
-  const { name, tannage, colour, finish, weightLowOz, weightHighOz, supplierId, active } = leather;
-  const pricePerFt2 = leather.pricePerFt2 ?? '';
   return {
-    name,
-    pricePerFt2,
-    tannage,
-    colour,
-    finish,
-    weightLowOz,
-    weightHighOz,
-    supplierId,
-    active,
+    name: leather.name,
+    pricePerFt2: leather.pricePerFt2 ?? '',
+    tannage: leather.tannage,
+    colour: leather.colour,
+    finish: leather.finish,
+    weightLowOz: leather.weightLowOz,
+    weightHighOz: leather.weightHighOz,
+    supplierId: leather.supplierId,
+    wholeForm: leather.wholeForm,
+    wholeAreaMm2: leather.wholeAreaMm2,
+    wholeUsablePercent: leather.wholeUsablePercent,
+    active: leather.active,
   };
 }

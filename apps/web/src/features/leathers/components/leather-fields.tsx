@@ -2,6 +2,7 @@ import { DecimalField } from '../../../components/decimal-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
+import { WholeFields } from './whole-fields.tsx';
 
 /** What the supplier sells, as its list reads. */
 export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
@@ -35,6 +36,7 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
           choices={suppliers}
         />
       )}
+      <WholeFields />
     </>
   );
 }
