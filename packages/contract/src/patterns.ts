@@ -15,6 +15,7 @@ import {
 } from './fields.ts';
 import { layout, layoutFields, refineLayoutFields } from './layouts.ts';
 import { onceSound } from './once-sound.ts';
+import { refineOptions, refineSteps } from './pattern-rules.ts';
 import { workPlan } from './work-plan.ts';
 
 const perPiece = positiveCount.max(1000, 'Enter at most 1,000 for each piece.');
@@ -78,6 +79,8 @@ export const patternDefinition = z
   })
   .superRefine((definition, context) => {
     refineLayoutFields(definition, context);
+    refineSteps(definition, context);
+    refineOptions(definition, context);
     definition.hardware.forEach(({ hardwareId }, at) => {
       if (definition.hardware.findIndex((each) => each.hardwareId === hardwareId) === at) return;
       context.addIssue({

@@ -71,6 +71,37 @@ describe('a pattern', () => {
     expect(definition.work).toEqual({ kind: 'steps', steps });
   });
 
+  it('keeps waits, supplies and options, and tells the maker no cost of them', async () => {
+    const { id, definition } = await addPattern({
+      hardware: [{ hardwareId, perPiece: 2, fromStep: 0, lossPercent: '2' }],
+      supplies: [{ name: 'Edge dye', cost: '1.8', per: 'hundred' }],
+      options: [{ name: 'Plain', swaps: [{ hardwareId, byHardwareId: null, perPiece: 1 }] }],
+      work: {
+        kind: 'steps',
+        secondsPercent: '2',
+        steps: [
+          {
+            name: 'Dye',
+            per: 'piece',
+            setupMinutes: '5',
+            secondsPerUnit: '24',
+            rejectPercent: '2',
+            shortestWait: '60',
+            pieceRate: '0.2',
+          },
+        ],
+      },
+    });
+    expect(definition).toMatchObject({
+      supplies: [{ cost: '1.8' }],
+      work: { secondsPercent: '2' },
+    });
+    const { body } = await shop.as('maker').get(`/api/patterns/${id}`).expect(200);
+    expect(body.definition.supplies).toEqual([{ name: 'Edge dye', per: 'hundred' }]);
+    expect(body.definition.work.steps[0]).toMatchObject({ shortestWait: '60' });
+    expect(body.definition.work.steps[0].pieceRate).toBeUndefined();
+  });
+
   it('stays as it was in earlier versions when it changes', async () => {
     const pattern = await addPattern();
     const wider = coaster(leatherId, { outline: { shape: 'round', diameterMm: '101.6' } });
@@ -194,6 +225,11 @@ describe('a pattern is refused', () => {
     secondsPerUnit: '12',
     rejectPercent: '0',
   };
+  const swap = (hardwareId: number | null, byHardwareId: number | null) => ({
+    hardwareId,
+    byHardwareId,
+    perPiece: 1,
+  });
   it.each([
     ['without a leather', { leatherId: undefined }, 'definition.leatherId'],
     ['of a leather that is not there', { leatherId: 999_999 }, 'definition.leatherId'],
@@ -239,6 +275,53 @@ describe('a pattern is refused', () => {
       'with a step per hour',
       { work: { kind: 'steps', steps: [{ ...step, per: 'hour' }] } },
       'definition.work.steps.0.per',
+    ],
+    [
+      'with hardware for a step that is not there',
+      { hardware: [{ hardwareId: 1, perPiece: 1, fromStep: 1 }] },
+      'definition.hardware.0.fromStep',
+    ],
+    [
+      'with a longest wait that is over before the shortest',
+      { work: { kind: 'steps', steps: [{ ...step, shortestWait: '60', longestWait: '30' }] } },
+      'definition.work.steps.0.longestWait',
+    ],
+    [
+      'with a supply that costs less than nothing',
+      { supplies: [{ name: 'Dye', cost: '-1', per: 'run' }] },
+      'definition.supplies.0.cost',
+    ],
+    [
+      'with a supply per panel',
+      { supplies: [{ name: 'Dye', cost: '1', per: 'panel' }] },
+      'definition.supplies.0.per',
+    ],
+    [
+      'with an option that changes nothing',
+      { options: [{ name: 'Plain', swaps: [swap(null, null)] }] },
+      'definition.options.0.swaps.0.hardwareId',
+    ],
+    [
+      'with an option that leaves out what is not there',
+      { options: [{ name: 'Plain', swaps: [swap(1, null)] }] },
+      'definition.options.0.swaps.0.hardwareId',
+    ],
+    [
+      'with two options of one name',
+      { options: [1, 2].map((id) => ({ name: 'Ringed', swaps: [swap(null, id)] })) },
+      'definition.options.1.name',
+    ],
+    [
+      'with a learning curve on which later pieces take no time',
+      {
+        work: {
+          kind: 'minutesPer100',
+          minutes: '90',
+          rejectPercent: '5',
+          learning: { model: 'unit', curvePercent: '50', measuredAt: 20 },
+        },
+      },
+      'definition.work.learning.curvePercent',
     ],
     ['with an unknown field', { colour: 'brown' }, 'definition.colour'],
     [

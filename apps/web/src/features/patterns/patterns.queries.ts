@@ -49,6 +49,14 @@ export function hardwareChoicesQuery() {
   });
 }
 
+/** What each kind of hardware is called, also those that the shop keeps no more. */
+export function hardwareNamesQuery() {
+  return queryOptions({
+    ...hardwareChoicesQuery(),
+    select: ({ items }) => new Map(items.map(({ id, name }) => [id, name])),
+  });
+}
+
 /** The shop's spacing, trim and rejects, with which a new pattern begins. */
 export function startingValuesQuery() {
   return queryOptions({

@@ -1,5 +1,6 @@
 import type { PatternDefinition, Workshop } from '@hidewright/contract';
 import { describe, expect, it } from 'vitest';
+import { afterMove, afterRemoval, blankSwap } from './typed-parts.ts';
 import { blankPattern, patternBody, patternForm, typedPattern } from './typed-pattern.ts';
 
 const startingValues = { spacingMm: '2', trimMm: '3', rejectPercent: '10' } as Workshop;
@@ -31,6 +32,61 @@ const tag: PatternDefinition = {
   needsPlate: false,
   history: null,
 };
+
+/** All that can be said about a pattern beside what it must have. */
+const full: PatternDefinition = {
+  ...tag,
+  hardware: [
+    { hardwareId: 2, perPiece: 1, fromStep: 1, lossPercent: '3' },
+    { hardwareId: 3, perPiece: 2 },
+  ],
+  supplies: [{ name: 'Edge dye', cost: '1.8', per: 'hundred' }],
+  options: [
+    {
+      name: 'With a brass ring',
+      swaps: [
+        { hardwareId: 2, byHardwareId: 4, perPiece: 1 },
+        { hardwareId: 3, byHardwareId: null, perPiece: 1 },
+        { hardwareId: null, byHardwareId: 5, perPiece: 2 },
+      ],
+    },
+  ],
+  work: {
+    kind: 'steps',
+    secondsPercent: '2',
+    learning: { model: 'cumulative', curvePercent: '90', measuredAt: 50 },
+    steps: [
+      {
+        name: 'Case',
+        setupMinutes: '6',
+        secondsPerUnit: '40',
+        per: 'panel',
+        rejectPercent: '0',
+        longestWait: '30',
+      },
+      {
+        name: 'Cut',
+        setupMinutes: '5',
+        secondsPerUnit: '12',
+        per: 'piece',
+        rejectPercent: '2',
+        people: 2,
+        unattended: true,
+        shortestWait: '60',
+        pieceRate: '0.12',
+      },
+    ],
+  },
+  history: { good: 940, total: 1000 },
+};
+
+interface Typed {
+  name: string;
+  definition: Record<string, unknown> & { work: { steps: Record<string, unknown>[] } };
+}
+
+const typedFull = () =>
+  structuredClone(typedPattern({ name: 'Tag', definition: full })) as never as Typed;
 
 describe('a pattern in its form', () => {
   it('is sent as it came when nothing is typed', () => {
@@ -80,5 +136,71 @@ describe('a pattern in its form', () => {
       'definition.leatherId',
       'definition.work.minutes',
     ]);
+  });
+
+  it('is sent with all that is said about it as it came', () => {
+    const { definition } = patternBody(typedFull());
+    expect(JSON.parse(JSON.stringify(definition))).toEqual(full);
+    expect(patternForm.safeParse(typedFull()).error?.issues).toBeUndefined();
+  });
+
+  it('leaves out what is left empty, so that it says no more than before', () => {
+    const typed = structuredClone(typedPattern({ name: 'Tag', definition: tag })) as never as Typed;
+    Object.assign(typed.definition['work'].steps[0] ?? {}, {
+      people: undefined,
+      unattended: false,
+      shortestWait: '',
+      pieceRate: undefined,
+    });
+    const { definition } = patternBody(typed);
+    expect(Object.keys(definition)).not.toContain('supplies');
+    expect(definition['work']).toStrictEqual(tag.work);
+    expect(definition['hardware']).toStrictEqual(tag.hardware);
+  });
+
+  it('keeps what its own runs say until rejects are changed by hand', () => {
+    const moved = typedFull();
+    moved.definition.work.steps.reverse();
+    expect(patternBody(moved).definition['history']).toEqual(full.history);
+    const changed = typedFull();
+    Object.assign(changed.definition.work.steps[1] ?? {}, { rejectPercent: '4' });
+    expect(patternBody(changed).definition['history']).toBeNull();
+  });
+
+  it('lets hardware wait for no step that is gone, and nothing be counted that is left out', () => {
+    const typed = typedFull();
+    typed.definition.work.steps.pop();
+    const swaps = [{ hardwareId: 3, byHardwareId: null, perPiece: '' }];
+    typed.definition['options'] = [{ name: 'Without rivets', swaps }];
+    const { definition } = patternBody(typed);
+    expect(definition['hardware']).toEqual([
+      { hardwareId: 2, perPiece: 1, lossPercent: '3' },
+      { hardwareId: 3, perPiece: 2 },
+    ]);
+    expect(definition['options']).toMatchObject([{ swaps: [{ byHardwareId: null, perPiece: 1 }] }]);
+  });
+
+  it('is told beside the field what an option or a supply lacks', () => {
+    const typed = typedFull();
+    typed.definition['supplies'] = [{ name: '', cost: '', per: 'hundred' }];
+    typed.definition['options'] = [{ name: '', swaps: [blankSwap] }];
+    const issues = patternForm.safeParse(typed).error?.issues ?? [];
+    expect(issues.map(({ path }) => path.join('.'))).toEqual([
+      'definition.supplies.0.name',
+      'definition.supplies.0.cost',
+      'definition.options.0.name',
+      'definition.options.0.swaps.0.hardwareId',
+    ]);
+  });
+});
+
+describe('hardware that waits for a step', () => {
+  it('goes with it when steps change places', () => {
+    expect([0, 1, 2, 3].map((step) => afterMove(step, 0, 2))).toEqual([2, 0, 1, 3]);
+    expect([0, 1, 2, 3].map((step) => afterMove(step, 3, 1))).toEqual([0, 2, 3, 1]);
+  });
+
+  it('waits for none once its step is gone', () => {
+    expect([0, 1, 2].map((step) => afterRemoval(step, 1))).toEqual([0, undefined, 1]);
   });
 });

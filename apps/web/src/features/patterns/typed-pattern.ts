@@ -5,6 +5,8 @@ import {
   type Workshop,
 } from '@hidewright/contract';
 import { z } from 'zod';
+import { hardwareBody, partsBody } from './typed-parts.ts';
+import { blankWork, rejectsOf, stepCount, typedWork, workBody } from './typed-work.ts';
 
 /** What a form holds: every measure of every shape, so that going from one to another and back loses nothing. */
 type Typed = Record<string, unknown>;
@@ -20,20 +22,6 @@ const containerMeasures: Record<string, readonly string[]> = {
   panel: ['widthMm', 'heightMm'],
   strip: ['widthMm', 'lengthMm'],
 };
-const workMeasures: Record<string, readonly string[]> = {
-  minutesPer100: ['minutes', 'rejectPercent'],
-  steps: ['steps'],
-};
-
-/** A step as it is before anything is typed. */
-export const blankStep = {
-  name: '',
-  per: 'piece',
-  setupMinutes: '0',
-  secondsPerUnit: '',
-  rejectPercent: '0',
-};
-
 const blankDefinition = {
   layoutBy: 'outline',
   alsoDrawn: false,
@@ -58,7 +46,9 @@ const blankDefinition = {
   trimMm: '',
   leatherId: '',
   hardware: [],
-  work: { kind: 'minutesPer100', minutes: '', rejectPercent: '', steps: [blankStep] },
+  supplies: [],
+  options: [],
+  work: blankWork,
   needsDie: true,
   needsPlate: false,
   history: null,
@@ -66,7 +56,7 @@ const blankDefinition = {
 
 /** A new pattern, with the shop's own starting values. */
 export function blankPattern({ spacingMm, trimMm, rejectPercent }: Workshop): Typed {
-  const work = { ...blankDefinition.work, rejectPercent };
+  const work = { ...blankWork, rejectPercent };
   return { name: '', definition: { ...blankDefinition, spacingMm, trimMm, work } };
 }
 
@@ -81,7 +71,11 @@ export function typedPattern({ name, definition }: Pick<Pattern, 'name' | 'defin
       outline: { ...blank.outline, ...definition.outline },
       handCount: { ...blank.handCount, ...definition.handCount },
       container: { ...blank.container, ...definition.container },
-      work: { ...blank.work, rejectPercent: '0', ...definition.work },
+      supplies: definition.supplies ?? [],
+      options: definition.options ?? [],
+      work: typedWork(definition.work),
+      // Said about the history, and not sent: the rejects that the shop's own runs stand beside.
+      rejectsThen: rejectsOf(definition.work),
     },
   };
 }
@@ -108,15 +102,25 @@ export function layoutBody(definition: Typed): Typed {
 }
 
 function definitionBody(definition: Typed): Typed {
+  const work = definition['work'] as Typed;
+  const hardware = definition['hardware'] as Typed[];
   return {
     ...layoutBody(definition),
     leatherId: definition['leatherId'],
-    hardware: definition['hardware'],
-    work: chosen(definition['work'], 'kind', workMeasures),
+    hardware: hardware.map((line) => hardwareBody(line, stepCount(work))),
+    ...partsBody(definition),
+    work: workBody(work),
+    ...historyBody(definition, work),
     needsDie: definition['needsDie'],
     needsPlate: definition['needsPlate'],
     history: definition['history'] ?? null,
   };
+}
+
+/** The shop's own runs stand for the rejects, until somebody says otherwise by hand. */
+function historyBody({ history, rejectsThen }: Typed, work: Typed): Typed {
+  if (history === undefined) return {};
+  return { history: rejectsOf(work) === rejectsThen ? history : null };
 }
 
 function chosen(value: unknown, by: string, measures: Record<string, readonly string[]>): Typed {

@@ -8,6 +8,7 @@ import { SelectField } from '../../../components/select-field.tsx';
 import { unitPriceText } from '../../../lib/formatting.ts';
 import { hardwareChoicesQuery } from '../patterns.queries.ts';
 import { AddHardwareDialog } from './add-hardware-dialog.tsx';
+import { MoreOfHardware } from './more-of-hardware.tsx';
 import { RemoveButton } from './remove-button.tsx';
 
 const name = 'definition.hardware';
@@ -42,6 +43,9 @@ export function HardwareFields() {
             </div>
             <NumberField name={`${name}.${at}.perPiece`} label="For each piece" whenEmpty="text" />
             <RemoveButton label={`Remove hardware ${at + 1}`} onRemove={() => remove(at)} />
+            <div className="basis-full">
+              <MoreOfHardware at={at} />
+            </div>
           </div>
         ))}
       </div>

@@ -5,6 +5,8 @@ import { HardwareFields } from './hardware-fields.tsx';
 import { LayoutFields } from './layout-fields.tsx';
 import { LayoutPreview } from './layout-preview.tsx';
 import { LeatherField } from './leather-field.tsx';
+import { OptionFields } from './option-fields.tsx';
+import { SupplyFields } from './supply-fields.tsx';
 import { WorkFields } from './work-fields.tsx';
 
 /** All of a pattern: on a wide screen the drawing stays beside what is typed, on a phone it follows the measures. */
@@ -22,6 +24,8 @@ export function PatternFields() {
         <Stitch />
         <LeatherField />
         <HardwareFields />
+        <SupplyFields />
+        <OptionFields />
         <Stitch />
         <WorkFields />
         <fieldset className="space-y-1">

@@ -1,13 +1,15 @@
 import { stepUnits } from '@hidewright/contract';
 import { ArrowDown, ArrowUp, Plus } from 'lucide-react';
 import type { ReactNode } from 'react';
-import { useFieldArray } from 'react-hook-form';
+import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
-import { blankStep } from '../typed-pattern.ts';
+import { afterMove, afterRemoval } from '../typed-parts.ts';
+import { blankStep } from '../typed-work.ts';
 import { FieldRow } from './field-row.tsx';
+import { MoreOfStep } from './more-of-step.tsx';
 import { RemoveButton } from './remove-button.tsx';
 
 const name = 'definition.work.steps';
@@ -17,19 +19,28 @@ const most = 40;
 /** The operations of the work, in their order on the ticket. */
 export function StepFields() {
   const { fields, append, remove, move } = useFieldArray({ name });
+  const hardwareFollows = useHardwareThatFollows();
+  const moveStep = (from: number, to: number) => {
+    move(from, to);
+    hardwareFollows((step) => afterMove(step, from, to));
+  };
+  const removeStep = (at: number) => {
+    remove(at);
+    hardwareFollows((step) => afterRemoval(step, at));
+  };
   return (
     <div>
       <ol className="space-y-4">
         {fields.map((field, at) => (
           <StepRow key={field.id} at={at}>
-            <MoveButton up at={at} disabled={at === 0} onMove={() => move(at, at - 1)} />
+            <MoveButton up at={at} disabled={at === 0} onMove={() => moveStep(at, at - 1)} />
             <MoveButton
               at={at}
               disabled={at === fields.length - 1}
-              onMove={() => move(at, at + 1)}
+              onMove={() => moveStep(at, at + 1)}
             />
             {fields.length > 1 && (
-              <RemoveButton label={`Remove step ${at + 1}`} onRemove={() => remove(at)} />
+              <RemoveButton label={`Remove step ${at + 1}`} onRemove={() => removeStep(at)} />
             )}
           </StepRow>
         ))}
@@ -45,6 +56,18 @@ export function StepFields() {
       )}
     </div>
   );
+}
+
+/** Hardware that waits for a step goes on waiting for it when it changes places. */
+function useHardwareThatFollows() {
+  const { getValues, setValue } = useFormContext();
+  return (follow: (step: number) => number | undefined) => {
+    const lines = (getValues('definition.hardware') ?? []) as { fromStep?: unknown }[];
+    lines.forEach(({ fromStep }, at) => {
+      if (typeof fromStep !== 'number') return;
+      setValue(`definition.hardware.${at}.fromStep`, follow(fromStep), { shouldDirty: true });
+    });
+  };
 }
 
 function StepRow({ at, children }: { at: number; children: ReactNode }) {
@@ -64,6 +87,9 @@ function StepRow({ at, children }: { at: number; children: ReactNode }) {
           <SelectField name={field('per')} label="Counted" choices={perChoices} short />
           <DecimalField name={field('rejectPercent')} label="Rejects" unit="%" />
         </FieldRow>
+      </div>
+      <div className="mt-2">
+        <MoreOfStep at={at} />
       </div>
     </li>
   );

@@ -1,5 +1,6 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import { minutesText, numberText, percentText } from '../../../lib/formatting.ts';
+import { stepNotes } from '../step-notes.ts';
 
 type Steps = Extract<PatternDefinition['work'], { kind: 'steps' }>['steps'];
 
@@ -30,6 +31,7 @@ export function StepsTable({ steps }: { steps: Steps }) {
           <tr key={at} className="stitched bg-[length:100%_2px] bg-top">
             <th scope="row" className="py-1.5 text-left font-semibold">
               {`${at + 1} ${step.name}`}
+              <StepNote>{stepNotes(step)}</StepNote>
             </th>
             <td className={`${right} whitespace-nowrap`}>{minutesText(step.setupMinutes)}</td>
             <td className={right}>{`${numberText(step.secondsPerUnit, 2)} s per ${step.per}`}</td>
@@ -39,4 +41,8 @@ export function StepsTable({ steps }: { steps: Steps }) {
       </tbody>
     </table>
   );
+}
+
+function StepNote({ children }: { children: string }) {
+  return children !== '' && <span className="block text-sm font-normal">{children}</span>;
 }

@@ -5,6 +5,8 @@ import { RadioCards } from '../../../components/radio-cards.tsx';
 import { countText } from '../../../lib/formatting.ts';
 import { useFreshErrors } from '../use-fresh-errors.ts';
 import { FieldRow } from './field-row.tsx';
+import { OwnRuns } from './own-runs.tsx';
+import { PracticeFields } from './practice-fields.tsx';
 import { StepFields } from './step-fields.tsx';
 
 const ways = [
@@ -40,6 +42,8 @@ export function WorkFields() {
           />
         </FieldRow>
       )}
+      <OwnRuns />
+      <PracticeFields />
     </>
   );
 }

@@ -1,0 +1,62 @@
+import type { PatternDefinition } from '@hidewright/contract';
+import { countText, percentText, unitPriceText } from '../../lib/formatting.ts';
+
+type Hardware = PatternDefinition['hardware'][number];
+type Supply = NonNullable<PatternDefinition['supplies']>[number];
+type Option = NonNullable<PatternDefinition['options']>[number];
+type Learning = NonNullable<PatternDefinition['work']['learning']>;
+type Names = ReadonlyMap<number, string>;
+
+export const learningModels: Record<Learning['model'], string> = {
+  unit: 'each piece (Crawford)',
+  cumulative: 'running average (Wright)',
+};
+
+const nameOf = (names: Names, id: number): string => names.get(id) ?? 'hardware no longer kept';
+
+/** 2 × Rivet, from step 4 Fold and rivet on, 2 % spoiled */
+export function hardwareWords(
+  line: Hardware,
+  names: Names,
+  work: PatternDefinition['work'],
+): string {
+  const notes = [
+    `${countText(line.perPiece)} × ${nameOf(names, line.hardwareId)}`,
+    ...(typeof line.fromStep === 'number' ? [fromStepWords(line.fromStep, work)] : []),
+    ...(line.lossPercent === undefined ? [] : [`${percentText(line.lossPercent)} spoiled`]),
+  ];
+  return notes.join(', ');
+}
+
+function fromStepWords(step: number, work: PatternDefinition['work']): string {
+  const name = work.kind === 'steps' ? work.steps[step]?.name : undefined;
+  return name === undefined ? 'for every piece cut' : `from step ${step + 1} ${name} on`;
+}
+
+const pers: Record<Supply['per'], string> = {
+  piece: 'for each piece',
+  hundred: 'for 100 pieces',
+  run: 'for the run',
+};
+
+/** Edge dye, 1.80 for 100 pieces; without its cost for whoever may not see it. */
+export function supplyWords({ name, cost, per }: Supply): string {
+  return cost === undefined ? name : `${name}, ${unitPriceText(cost)} ${pers[per]}`;
+}
+
+/** With a brass ring: D-ring in place of Buckle */
+export function optionWords({ name, swaps }: Option, names: Names): string {
+  return `${name}: ${swaps.map((swap) => swapWords(swap, names)).join('; ')}`;
+}
+
+function swapWords({ hardwareId, byHardwareId, perPiece }: Option['swaps'][number], names: Names) {
+  const out = hardwareId === null ? undefined : nameOf(names, hardwareId);
+  if (byHardwareId === null) return `without ${out ?? 'anything else'}`;
+  const comes = `${countText(perPiece)} × ${nameOf(names, byHardwareId)}`;
+  return out === undefined ? `${comes} more` : `${comes} in place of ${out}`;
+}
+
+/** each doubling leaves 90 %, running average (Wright), times from a run of 50 */
+export function learningWords({ model, curvePercent, measuredAt }: Learning): string {
+  return `each doubling leaves ${percentText(curvePercent)}, ${learningModels[model]}, times from a run of ${countText(measuredAt)}`;
+}
