@@ -10,7 +10,6 @@ import {
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { adviseCut, type WorkedAdvice } from '../../flows/advice/advise-cut.ts';
-import { adviseCut } from '../../flows/advice/advise-cut.ts';
 import { adviseTooling } from '../../flows/advice/advise-tooling.ts';
 import { addPattern, changePattern } from '../../flows/save-pattern.ts';
 import { readCursor, toPage } from '../../http/paging.ts';

@@ -12,6 +12,7 @@ import { LearnedCard } from '../../../features/patterns/components/learned-card.
 import { PutAwayButton } from '../../../features/patterns/components/put-away-button.tsx';
 import { TemplateLinks } from '../../../features/patterns/components/template-links.tsx';
 import { VersionsList } from '../../../features/patterns/components/versions-list.tsx';
+import { WaysCard } from '../../../features/patterns/components/ways-card.tsx';
 import { WhatItTakes } from '../../../features/patterns/components/what-it-takes.tsx';
 import { layoutSubtitle } from '../../../features/patterns/layout-words.ts';
 import { patternQuery } from '../../../features/patterns/patterns.queries.ts';
@@ -69,6 +70,7 @@ export function Component() {
             </p>
           </Card>
           <LearnedCard patternId={id} isOwner={isOwner} />
+          <WaysCard pattern={pattern} />
           <Tooling pattern={pattern} isOwner={isOwner} />
           <PressCard pattern={pattern} />
           <Card title="Versions" subtitle="Quotes keep the version they were made with.">
