@@ -158,15 +158,6 @@ describe('a pattern in its form', () => {
     expect(definition['hardware']).toStrictEqual(tag.hardware);
   });
 
-  it('keeps what its own runs say until rejects are changed by hand', () => {
-    const moved = typedFull();
-    moved.definition.work.steps.reverse();
-    expect(patternBody(moved).definition['history']).toEqual(full.history);
-    const changed = typedFull();
-    Object.assign(changed.definition.work.steps[1] ?? {}, { rejectPercent: '4' });
-    expect(patternBody(changed).definition['history']).toBeNull();
-  });
-
   it('lets hardware wait for no step that is gone, and nothing be counted that is left out', () => {
     const typed = typedFull();
     typed.definition.work.steps.pop();

@@ -6,7 +6,7 @@ import {
 } from '@hidewright/contract';
 import { z } from 'zod';
 import { hardwareBody, partsBody } from './typed-parts.ts';
-import { blankWork, rejectsOf, stepCount, typedWork, workBody } from './typed-work.ts';
+import { blankWork, stepCount, typedWork, workBody } from './typed-work.ts';
 
 /** What a form holds: every measure of every shape, so that going from one to another and back loses nothing. */
 type Typed = Record<string, unknown>;
@@ -74,8 +74,6 @@ export function typedPattern({ name, definition }: Pick<Pattern, 'name' | 'defin
       supplies: definition.supplies ?? [],
       options: definition.options ?? [],
       work: typedWork(definition.work),
-      // Said about the history, and not sent: the rejects that the shop's own runs stand beside.
-      rejectsThen: rejectsOf(definition.work),
     },
   };
 }
@@ -110,17 +108,10 @@ function definitionBody(definition: Typed): Typed {
     hardware: hardware.map((line) => hardwareBody(line, stepCount(work))),
     ...partsBody(definition),
     work: workBody(work),
-    ...historyBody(definition, work),
     needsDie: definition['needsDie'],
     needsPlate: definition['needsPlate'],
     history: definition['history'] ?? null,
   };
-}
-
-/** The shop's own runs stand for the rejects, until somebody says otherwise by hand. */
-function historyBody({ history, rejectsThen }: Typed, work: Typed): Typed {
-  if (history === undefined) return {};
-  return { history: rejectsOf(work) === rejectsThen ? history : null };
 }
 
 function chosen(value: unknown, by: string, measures: Record<string, readonly string[]>): Typed {

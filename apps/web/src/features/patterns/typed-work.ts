@@ -39,7 +39,7 @@ export function workBody(work: Typed): Typed {
       ? { steps: stepsOf(work).map(stepBody) }
       : pick(work, ['minutes', 'rejectPercent'])),
     ...filled(pick(work, ['secondsPercent'])),
-    ...(learning?.['model'] && { learning }),
+    ...(Boolean(learning?.['model']) && { learning }),
   };
 }
 
@@ -54,13 +54,6 @@ function stepBody(step: Typed): Typed {
 /** How many steps hardware can wait for; one figure for all of the work is a single step. */
 export function stepCount(work: Typed): number {
   return work['kind'] === 'steps' ? stepsOf(work).length : 1;
-}
-
-/** The rejects by which pieces fail, whichever step they stand at: moving a step changes none of them. */
-export function rejectsOf(work: Typed): string {
-  const all = work['kind'] === 'steps' ? stepsOf(work) : [work];
-  const shares = all.map((each) => Number(each['rejectPercent'])).filter((share) => share !== 0);
-  return shares.sort((one, other) => one - other).join(' ');
 }
 
 function stepsOf(work: Typed): Typed[] {

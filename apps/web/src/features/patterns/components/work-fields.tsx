@@ -5,7 +5,6 @@ import { RadioCards } from '../../../components/radio-cards.tsx';
 import { countText } from '../../../lib/formatting.ts';
 import { useFreshErrors } from '../use-fresh-errors.ts';
 import { FieldRow } from './field-row.tsx';
-import { OwnRuns } from './own-runs.tsx';
 import { PracticeFields } from './practice-fields.tsx';
 import { StepFields } from './step-fields.tsx';
 
@@ -42,7 +41,6 @@ export function WorkFields() {
           />
         </FieldRow>
       )}
-      <OwnRuns />
       <PracticeFields />
     </>
   );
