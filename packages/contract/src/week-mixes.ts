@@ -1,3 +1,4 @@
+import { InvalidInput, readWeek } from '@hidewright/domain';
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
 import { line, minutes, money, signedMoney, workedOut } from './fields.ts';
@@ -34,7 +35,7 @@ const kindOfWork = z.strictObject({
 });
 export type KindOfWorkTyped = z.infer<typeof kindOfWork>;
 
-const week = z.strictObject({
+const weekFields = z.strictObject({
   /** All hands together, desk time included. */
   hoursPerWeek: hours.refine((text) => Number(text) > 0, hoursSentence),
   /** Desk time that belongs to no order. */
@@ -46,6 +47,19 @@ const week = z.strictObject({
     .min(1, 'Enter at least one kind of work.')
     .max(40, 'Keep it to 40 kinds of work.'),
 });
+/** What no field can tell alone, as that more is promised than there are hours for: the domain's own sentence. */
+const week = weekFields.superRefine((typed, context) => {
+  if (context.issues.length > 0) return;
+  try {
+    readWeek(typed);
+  } catch (error) {
+    if (!(error instanceof InvalidInput)) throw error;
+    context.addIssue({ code: 'custom', path: pathOf(error.field), message: error.message });
+  }
+});
+
+const pathOf = (field: string) =>
+  field.split('.').map((part) => (/^\d+$/.test(part) ? Number(part) : part));
 export type WeekTyped = z.infer<typeof week>;
 
 const mixedKind = z.object({

@@ -114,6 +114,7 @@ export * from './promise/two-machine.ts';
 export * from './plan/machine-pays.ts';
 export * from './plan/linear-programme.ts';
 export type * from './plan/week.ts';
+export { readWeek } from './plan/read-week.ts';
 export { weekMix } from './plan/week-mix.ts';
 
 export * from './compare/compare-run.ts';
