@@ -55,7 +55,8 @@ async function openShop(shop: DemoShop): Promise<void> {
     for (const each of others)
       work.em.create(Person, { ...each, passwordHash, createdAt: work.now.toISOString() });
     const workshop = await work.em.findOneOrFail(Workshop, 1);
-    work.em.assign(workshop, { address: shopOf.address, taxNumber: shopOf.taxNumber });
+    const { address, taxNumber, rates } = shopOf;
+    work.em.assign(workshop, { address, taxNumber, ...decimals(rates) });
     await work.em.flush();
   });
   await shop.meetPeople();
@@ -85,6 +86,7 @@ async function furnishRooms(work: Work): Promise<Furnished> {
       weightLowOz: new Decimal(each.weightLowOz),
       weightHighOz: new Decimal(each.weightHighOz),
       pricePerFt2: new Decimal(each.pricePerFt2),
+      wholeAreaMm2: new Decimal(each.wholeAreaMm2),
       supplierId: furnished.suppliers.id(supplier),
     });
     await note(work, furnished.leathers, 'leather', leather);
@@ -137,22 +139,39 @@ async function furnishTaxRate(work: Work): Promise<number> {
   return rate.id;
 }
 
+/** A pattern of the scenario, with the numbers that its names have got. */
+function definitionFrom(
+  { leathers: kinds, hardware: parts }: Furnished,
+  { leather, hardware: lines, ...rest }: (typeof patterns)[number]['definition'],
+): PatternDefinition {
+  const idOf = (name: string | null) => (name === null ? null : parts.id(name));
+  return {
+    ...rest,
+    work: rest.work.kind === 'steps' ? { ...rest.work, steps: [...rest.work.steps] } : rest.work,
+    leatherId: kinds.id(leather),
+    hardware: lines.map(({ name, ...line }) => ({ hardwareId: parts.id(name), ...line })),
+    supplies: 'supplies' in rest ? [...rest.supplies] : undefined,
+    options:
+      'options' in rest
+        ? rest.options.map(({ name, swaps }) => ({
+            name,
+            swaps: swaps.map(({ hardware: out, by, perPiece }) => ({
+              hardwareId: idOf(out),
+              byHardwareId: idOf(by),
+              perPiece,
+            })),
+          }))
+        : undefined,
+    history: null,
+  };
+}
+
 async function furnishPattern(
   shop: DemoShop,
   furnished: Furnished,
   pattern: (typeof patterns)[number],
 ): Promise<void> {
-  const { leather, hardware: parts, ...rest } = pattern.definition;
-  const definition: PatternDefinition = {
-    ...rest,
-    work: rest.work.kind === 'steps' ? { ...rest.work, steps: [...rest.work.steps] } : rest.work,
-    history: null,
-    leatherId: furnished.leathers.id(leather),
-    hardware: parts.map(({ name, perPiece }) => ({
-      hardwareId: furnished.hardware.id(name),
-      perPiece,
-    })),
-  };
+  const definition = definitionFrom(furnished, pattern.definition);
   const worked = await layoutFor(shop.context, definition);
   await shop.as('owner', async (work) => {
     const made = await addPattern(work, { name: pattern.name, definition }, worked);

@@ -1,9 +1,16 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import type { HardwareName, LeatherName } from './stockroom.ts';
 
-type Named = Omit<PatternDefinition, 'leatherId' | 'hardware' | 'history'> & {
+/** As in a definition, with names in place of numbers. */
+interface NamedOption {
+  name: string;
+  swaps: { hardware: HardwareName | null; by: HardwareName | null; perPiece: number }[];
+}
+
+type Named = Omit<PatternDefinition, 'leatherId' | 'hardware' | 'options' | 'history'> & {
   leather: LeatherName;
   hardware: { name: HardwareName; perPiece: number }[];
+  options?: NamedOption[];
 };
 
 interface DemoPattern {
@@ -24,6 +31,9 @@ const step = (
   rejectPercent: string,
 ) => ({ name, per, setupMinutes, secondsPerUnit, rejectPercent });
 
+/** Struck while damp. */
+const cased = { ...step('Case panels', 'panel', '6', '40', '0'), longestWait: '30' };
+
 export const patterns = [
   {
     name: 'Drinks coaster, round',
@@ -36,13 +46,18 @@ export const patterns = [
       ...spaced,
       leather: 'Oak tan natural 7–8 oz',
       hardware: [{ name: 'Card sleeves, kraft', perPiece: 1 }],
+      supplies: [
+        { name: 'Edge dye', cost: '2.4', per: 'hundred' },
+        { name: 'Beeswax', cost: '0.9', per: 'hundred' },
+      ],
       work: {
         kind: 'steps',
         steps: [
-          step('Case panels', 'panel', '6', '40', '0'),
+          cased,
           step('Stamp', 'strike', '10', '9', '3'),
           step('Cut', 'piece', '5', '6', '2'),
-          step('Dye and burnish edges', 'piece', '6', '24', '2'),
+          // Packed bone dry.
+          { ...step('Dye and burnish edges', 'piece', '6', '24', '2'), shortestWait: '60' },
           step('Inspect and pack', 'piece', '4', '12', '1'),
         ],
       },
@@ -71,10 +86,23 @@ export const patterns = [
         { name: 'Buckles 20 mm, solid brass', perPiece: 1 },
         { name: 'Rivets 7 mm, antique brass', perPiece: 2 },
       ],
+      supplies: [{ name: 'Edge dye', cost: '1.8', per: 'hundred' }],
+      options: [
+        {
+          name: 'With a brass ring',
+          swaps: [
+            {
+              hardware: 'Buckles 20 mm, solid brass',
+              by: 'D-rings 25 mm, solid brass',
+              perPiece: 1,
+            },
+          ],
+        },
+      ],
       work: {
         kind: 'steps',
         steps: [
-          step('Case panels', 'panel', '6', '40', '0'),
+          cased,
           step('Stamp', 'strike', '10', '9', '3'),
           step('Cut', 'piece', '5', '6', '1.5'),
           step('Fold and rivet', 'piece', '8', '42', '2'),

@@ -14,4 +14,5 @@ export const shop = {
   address: 'Marlpit Leather\nThe Old Maltings\nFennbridge',
   taxNumber: 'FB 000 000 000',
   taxRate: { name: 'Sales tax', percent: '6' },
+  rates: { minimumWagePerHour: '12', restPercent: '8', overheadPerHour: '4', minimumOrder: '60' },
 };

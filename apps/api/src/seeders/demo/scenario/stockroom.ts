@@ -50,6 +50,8 @@ export const plateOffers = [
   { metal: 'copper', price: '118.00', lifeUses: 50_000 },
   { metal: 'brass', price: '310.00', lifeUses: 100_000 },
 ] as const;
+/** 22 ft². */
+const usualSide = { wholeForm: 'side', wholeAreaMm2: '2043866.88' } as const;
 
 export const leathers = [
   {
@@ -59,6 +61,7 @@ export const leathers = [
     finish: 'waxed',
     weightLowOz: '5',
     weightHighOz: '6',
+    ...usualSide,
     pricePerFt2: '9.50',
     supplier: 'Oldbeck Tannery',
   },
@@ -69,6 +72,7 @@ export const leathers = [
     finish: 'unfinished',
     weightLowOz: '7',
     weightHighOz: '8',
+    ...usualSide,
     pricePerFt2: '11.80',
     supplier: 'Oldbeck Tannery',
   },
@@ -79,6 +83,7 @@ export const leathers = [
     finish: 'glazed',
     weightLowOz: '3',
     weightHighOz: '4',
+    ...usualSide,
     pricePerFt2: '8.40',
     supplier: 'Oldbeck Tannery',
   },
