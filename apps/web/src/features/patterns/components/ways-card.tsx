@@ -50,7 +50,9 @@ function Ways({ steps, perContainer }: { steps: Steps; perContainer: number }) {
             unit="s"
             help="to put a batch down and take it up again"
           />
-          <SelectField name="hands" label="Hands" choices={hands} short />
+          <div className="col-span-2 min-w-56">
+            <SelectField name="hands" label="Hands" choices={hands} />
+          </div>
         </FieldRow>
         <WaysTable steps={steps} perContainer={perContainer} asked={asked} />
       </div>
