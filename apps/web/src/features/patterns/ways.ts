@@ -4,7 +4,7 @@ import { waysOfWorking, type WayOfWorking } from '@hidewright/domain';
 export type Steps = Extract<Pattern['definition']['work'], { kind: 'steps' }>['steps'];
 
 /** What is asked about a run of the pattern. */
-export interface WaysAsked {
+interface WaysAsked {
   pieces: number;
   /** pieces handed on together in the way between the two others */
   transfer: number;
