@@ -1,7 +1,7 @@
 import { ink, inkSoft, sheet, stitchAcross, type Paper } from './paper.ts';
 import { printedNumber } from './paper-text.ts';
 
-export interface PricedRung {
+interface PricedRung {
   quantity: number;
   priceEach: string;
   goodsTotal: string;

@@ -12,7 +12,7 @@ import { shapeOf } from './shape.ts';
 import { type CutCell, CutCells } from './side-strip-cells.ts';
 
 /** Which way the cuts run: along the side's x, or along its y. */
-export type CutWay = 'x' | 'y';
+type CutWay = 'x' | 'y';
 
 /** A side cut into strips, each laid in the same rows. */
 export interface SideStripsPlan extends RegularPlan {

@@ -3,7 +3,7 @@ import type { RunInput } from '../costing/run-input.ts';
 import { lineAmount } from '../money/amounts.ts';
 import { type DecimalText, Exact, toPlaces } from '../numbers/decimal-text.ts';
 
-export type ChargeKind = 'set-up' | 'rush' | 'minimum' | 'carriage';
+type ChargeKind = 'set-up' | 'rush' | 'minimum' | 'carriage';
 
 /** What the customer pays once, beside the pieces and the tooling. */
 export interface Charge {
@@ -68,7 +68,7 @@ function chargesOn(input: RunInput, goods: Decimal): [ChargeKind, string, Decima
 }
 
 /** What the customer pays for tooling, once. */
-export function toolingCharge(input: RunInput): DecimalText {
+function toolingCharge(input: RunInput): DecimalText {
   const sum = input.tooling.reduce((total, { charge }) => total.plus(charge), new Exact(0));
   return sum.toFixed(input.minorDigits);
 }

@@ -5,7 +5,7 @@ import type { WorkPlan } from '../work/work-plan.ts';
 import { priceRun } from './price-run.ts';
 import type { BreakNumbers } from './run-numbers.ts';
 
-export type Shaken = 'rejects' | 'minutes' | 'leather price';
+type Shaken = 'rejects' | 'minutes' | 'leather price';
 
 interface Hourly {
   perBenchHour: DecimalText;

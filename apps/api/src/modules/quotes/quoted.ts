@@ -4,7 +4,7 @@ import { moneyText, priceText } from '../../http/decimal-text.ts';
 import type { Quote } from './quote.entity.ts';
 import { numbersOfQuote } from './quote-numbers.ts';
 
-export interface QuotedRung {
+interface QuotedRung {
   quantity: number;
   priceEach: string;
   goodsTotal: string;
