@@ -91,12 +91,13 @@ function valuesOf(workshop: Workshop) {
 }
 
 function layoutOf({ container, pieces, containerAreaMm2, rows, piecesPerRow }: Layout) {
-  const inRows = rows !== null && piecesPerRow !== null && piecesPerRow > 0;
+  // Where rows differ in length, a number of full rows would say nothing certain.
+  const inRows = rows !== null && piecesPerRow !== null && rows * piecesPerRow === pieces;
   return {
     form: container.form,
     pieces,
     containerAreaMm2,
-    ...(inRows && { rowPieces: piecesPerRow }),
+    ...(inRows && pieces > 0 && { rowPieces: piecesPerRow }),
   };
 }
 

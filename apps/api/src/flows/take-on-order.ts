@@ -100,6 +100,7 @@ async function makeOrder(
     toolingCharge: new Decimal(numbers.toolingCharge),
     optionName: quote.agreedOption,
     charges: numbers.charges.map(({ name, amount }) => ({ name, amount })),
+    chargesTotal: numbers.charges.reduce((sum, { amount }) => sum.plus(amount), new Decimal(0)),
     total: new Decimal(numbers.total),
     state: stateAwaiting(awaits),
     awaits,

@@ -9,14 +9,15 @@ const most = 100_000;
 /**
  * The fewest pieces with which a price reaches the target per bench hour, setting up and tooling
  * spread over more of them; null where even 100,000 do not. Whole panels make the figure jump a
- * little, so the answer is bracketed, halved, and then looked for one panel further down.
+ * little and a minimum order would let a single piece reach it, so that is left aside, and the answer is bracketed, halved, and then looked for one panel further down.
  * @param priceEach as decimal text
  * @throws InvalidInput · NotWorkable
  */
 export function quantityThatReaches(input: RunInput, priceEach: DecimalText): number | null {
   checkRunInput(input);
+  const plain = { ...input, minimumOrder: '0' };
   const reaches = (quantity: number) =>
-    new Exact(earn(input, costRun(input, quantity), priceEach).perBenchHour).gte(
+    new Exact(earn(plain, costRun(plain, quantity), priceEach).perBenchHour).gte(
       input.targetPerHour,
     );
   let [low, high] = [0, 1];

@@ -1,12 +1,12 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
-import type { Decimal } from 'decimal.js';
+import { Decimal } from 'decimal.js';
 import { MoneyType, UnitPriceType } from '../../db/columns/columns.ts';
 import { JsonText } from '../../db/columns/json-text.ts';
 
 /** A run that the shop has taken on. */
 @Entity({ tableName: 'customer_order' })
 export class Order {
-  [OptionalProps]?: 'charges' | 'version';
+  [OptionalProps]?: 'charges' | 'chargesTotal' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -42,6 +42,9 @@ export class Order {
   /** Charged once beside pieces and tooling. */
   @Property({ type: JsonText, columnType: 'text' })
   charges: { name: string; amount: string }[] = [];
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  chargesTotal: Decimal = new Decimal(0);
 
   @Property({ type: MoneyType, columnType: 'integer' })
   total!: Decimal;

@@ -72,9 +72,11 @@ export function Component() {
           )}
           {rung && quote.input && <OnePieceCard rung={rung} tooling={quote.input.tooling} />}
           {rung && (
-            <TextLink to={`/counter/quotes/${quote.id}/workings?${workingsOf(quantity, option)}`}>
-              All workings: hours, costs, what to cut, what if
-            </TextLink>
+            <p>
+              <TextLink to={`/counter/quotes/${quote.id}/workings?${workingsOf(quantity, option)}`}>
+                All workings: hours, costs, what to cut, what if
+              </TextLink>
+            </p>
           )}
           {isOwner && rung && ['draft', 'sent'].includes(quote.state) && (
             <ToolingThere
