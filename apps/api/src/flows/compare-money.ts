@@ -4,10 +4,12 @@ import { Decimal } from 'decimal.js';
 import { moneyText } from '../http/decimal-text.ts';
 import type { Used } from './used-by-job.ts';
 
+const asEstimated: readonly CostKind[] = ['supplies', 'tooling', 'packing', 'carriage', 'fees'];
+
 /**
- * What the run cost and earned, as it was said and as it was. Left: the price less leather, hardware, tooling and
- * packing. Per bench hour: left by bench hours. Per hour all in: left less all wages, by bench and desk hours. Tooling,
- * packing and desk time are taken as they were estimated.
+ * What the run cost and earned, as it was said and as it was. Left: the price less all that is bought. Per bench
+ * hour: left by bench hours. Per hour all in: left less all wages and overhead, by bench and desk hours. What is not
+ * recorded at the bench (supplies, tooling, packing, carriage, card fees, desk time) is taken as it was estimated.
  */
 export function compareMoney(input: RunInput, numbers: BreakNumbers, used: Used): Compared[] {
   const said = (kind: CostKind): Decimal =>
@@ -20,11 +22,10 @@ export function compareMoney(input: RunInput, numbers: BreakNumbers, used: Used)
   const left =
     leather === null || hardware === null
       ? null
-      : new Decimal(numbers.total)
-          .minus(leather)
-          .minus(hardware)
-          .minus(said('tooling'))
-          .minus(said('packing'));
+      : asEstimated.reduce(
+          (rest, kind) => rest.minus(said(kind)),
+          new Decimal(numbers.total).minus(leather).minus(hardware),
+        );
   return [
     row('Leather', said('leather'), leather),
     row('Hardware', said('hardware'), hardware),
@@ -54,5 +55,6 @@ function perHourAllIn(
   if (left === null || minutes === null) return null;
   const all = minutes.plus(input.deskMinutesPerOrder);
   const wages = all.times(input.wagePerHour).dividedBy(60);
-  return left.minus(wages).times(60).dividedBy(all);
+  const overhead = minutes.times(input.overheadPerHour ?? 0).dividedBy(60);
+  return left.minus(wages).minus(overhead).times(60).dividedBy(all);
 }

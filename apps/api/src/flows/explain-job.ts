@@ -61,10 +61,16 @@ function explainTime(
   numbers: BreakNumbers,
 ): { steps: StepDifference[]; wages: { other: string; sum: string } | null } {
   const limits = stepLimits(job, steps);
-  const run = { pieces: numbers.cutCount, containers: numbers.containers };
+  const run = {
+    pieces: numbers.cutCount,
+    containers: numbers.containers,
+    restPercent: input.restPercent,
+  };
   const said = benchMinutes(input.work, run).bySteps;
   const handled = steps.map((step, at) => handledOf(step, limits[at] ?? 0));
-  const times = steps.map((step, at) => timesOf(step, handled[at] ?? 0, said[at]?.minutes ?? '0'));
+  const times = steps.map((step, at) =>
+    timesOf(step, handled[at] ?? 0, said[at]?.minutes ?? '0', input.restPercent),
+  );
   const wages =
     used.minutes === null
       ? null
@@ -94,11 +100,18 @@ function handledOf(step: JobStep, limit: number): number {
   return step.per === 'run' ? 1 : handledIn(step) || limit;
 }
 
-function timesOf(step: JobStep, handled: number, said: string): StepTimes {
+function timesOf(
+  step: JobStep,
+  handled: number,
+  said: string,
+  restPercent: string | undefined,
+): StepTimes {
   const forMade = new Exact(handled)
     .times(step.secondsPerUnit.toString())
     .div(60)
-    .plus(step.setupMinutes.toString());
+    .plus(step.setupMinutes.toString())
+    .times(new Exact(restPercent ?? '0').plus(100))
+    .div(100);
   return { said, saidForMade: toAtMost(forMade, 4), was: step.minutes.toString() };
 }
 
