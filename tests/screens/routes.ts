@@ -74,6 +74,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner', 'bookkeeper'],
   },
   {
+    name: 'quote-workings',
+    list: '/quotes',
+    page: (id) => `/counter/quotes/${id}/workings`,
+    roles: ['owner'],
+  },
+  {
     name: 'order',
     list: '/orders',
     page: (id) => `/counter/orders/${id}`,

@@ -22,7 +22,7 @@ export async function changeQuote(
   await work.em.nativeDelete(QuoteBreak, { quoteId: quote.id });
   Object.assign(quote, workedOut);
   await work.em.flush();
-  await keepRungs(work, quote.id, workedOut);
+  keepRungs(work, quote.id, workedOut);
   await logDeed(work, {
     action: `worked out quote ${quote.number} again`,
     subjectKind: 'quote',

@@ -20,7 +20,7 @@ export async function createQuote(work: Work, asked: QuoteBody, laid: LaidPatter
     createdAt: work.now.toISOString(),
   });
   await work.em.flush();
-  await keepRungs(work, quote.id, workedOut);
+  keepRungs(work, quote.id, workedOut);
   await logDeed(work, {
     action: `drafted quote ${quote.number}`,
     subjectKind: 'quote',

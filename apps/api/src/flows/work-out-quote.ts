@@ -3,7 +3,7 @@ import type { QuoteBody } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
 import { invalid } from '../http/problem.ts';
 import { Customer } from '../modules/customers/customer.entity.ts';
-import { keepLayout } from '../modules/layouts/stored-layouts.ts';
+import { keepLayoutId } from '../modules/layouts/stored-layouts.ts';
 import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
 import type { Quote } from '../modules/quotes/quote.entity.ts';
 import type { Work } from '../work.ts';
@@ -35,12 +35,12 @@ export async function workOutQuote(
 ): Promise<WorkedOut> {
   await requireCustomer(work, asked.customerId);
   requireToCome(work, asked.inHandsOn);
-  const layout = await keepLayout(work, laid.worked);
+  const layoutId = await keepLayoutId(work, laid.worked);
   const input = await runInputFor(work, laid.definition, laid.worked.layout, asked);
   return {
     customerId: asked.customerId,
     patternVersionId: laid.versionId,
-    layoutId: layout.id,
+    layoutId,
     title: asked.title || laid.patternName,
     inHandsOn: asked.inHandsOn,
     overrides: setByHand(asked.overrides),
@@ -51,17 +51,16 @@ export async function workOutQuote(
   };
 }
 
-/** Keeps the rungs as rows of their own, where they can be looked up and agreed to. */
-export async function keepRungs(
-  work: Work,
+/** The rungs as rows of their own, where they can be looked up and agreed to; written with the next flush. */
+export function keepRungs(
+  { em }: Pick<Work, 'em'>,
   quoteId: number,
-  { input, numbers }: WorkedOut,
-): Promise<void> {
+  { input, numbers }: Pick<WorkedOut, 'input' | 'numbers'>,
+): void {
   for (const rung of numbers.breaks) {
     const typed = input.breaks.find((each) => each.quantity === rung.quantity)?.typedPrice ?? null;
-    work.em.create(QuoteBreak, rungRow(quoteId, rung, typed));
+    em.create(QuoteBreak, rungRow(quoteId, rung, typed));
   }
-  await work.em.flush();
 }
 
 const rungRow = (quoteId: number, rung: BreakNumbers, typed: string | null) => ({

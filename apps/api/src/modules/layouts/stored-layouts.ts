@@ -103,6 +103,16 @@ export async function keepLayout(
   return created;
 }
 
+/** The same where only its number is wanted: a layout of many pieces is long to read. */
+export async function keepLayoutId(
+  work: Pick<Work, 'em' | 'now'>,
+  worked: LayoutToKeep,
+): Promise<number> {
+  const { inputHash } = worked;
+  const stored = await work.em.findOne(StoredLayout, { inputHash }, { fields: ['id'] });
+  return stored?.id ?? (await keepLayout(work, worked)).id;
+}
+
 /** @throws {Problem} 404 */
 export async function findLayout(em: Work['em'], id: number): Promise<StoredLayout> {
   const stored = await em.findOne(StoredLayout, id);

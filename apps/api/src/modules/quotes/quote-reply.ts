@@ -26,7 +26,10 @@ export async function quoteReply(
   const customer = await work.em.findOneOrFail(Customer, quote.customerId);
   const version = await work.em.findOneOrFail(PatternVersion, quote.patternVersionId);
   const pattern = await work.em.findOneOrFail(Pattern, version.patternId);
-  const stored = await work.em.findOneOrFail(StoredLayout, quote.layoutId);
+  // Read only: beside the entities that are, it would be compared with what it was at every flush.
+  const stored = await work.em.findOneOrFail(StoredLayout, quote.layoutId, {
+    disableIdentityMap: true,
+  });
   const order = await work.em.findOne(Order, { quoteId: quote.id });
   const { breaks } = quotedOf(quote);
   const input = quote.input as RunInput;
