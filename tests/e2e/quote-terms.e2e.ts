@@ -17,7 +17,9 @@ walk('a quote with terms and an option, from its workings to the order', async (
   await signInAs(page, hidewright.url, 'owner');
   await visit(page, `${hidewright.url}/counter/quotes/new`);
   await page.getByLabel('Customer', { exact: true }).selectOption({ label: 'The Copper Heron' });
-  await page.getByLabel('Pattern', { exact: true }).selectOption({ label: 'Luggage tag with neck' });
+  await page
+    .getByLabel('Pattern', { exact: true })
+    .selectOption({ label: 'Luggage tag with neck' });
   await page.getByRole('checkbox', { name: 'With a brass ring' }).check();
   await page.getByText('Prices and terms').click();
   await page.getByLabel('Prices are worked out').selectOption('a markup on the cost');
@@ -27,9 +29,7 @@ walk('a quote with terms and an option, from its workings to the order', async (
   await page.getByRole('radio', { name: 'With a brass ring' }).check();
   await page.getByText(/setting up 15.00, rush/).waitFor();
   await expectAccessible(page);
-  const shown = await page
-    .getByText(/^\d[\d,]* come to$/)
-    .locator('xpath=following-sibling::dd[1]');
+  const shown = page.getByText(/^\d[\d,]* come to$/).locator('xpath=following-sibling::dd[1]');
   const preview = await shown.textContent();
   await page.getByRole('button', { name: 'Save the draft' }).click();
   await page.waitForURL(/counter\/quotes\/\d+$/);

@@ -3,7 +3,7 @@ import type { RunInput } from '../costing/run-input.ts';
 import { Exact } from '../numbers/decimal-text.ts';
 
 /** An amount in whole hundredths. */
-export const money = (min: number, max: number) =>
+const money = (min: number, max: number) =>
   fc
     .integer({ min: min * 100, max: max * 100 })
     .map((cents) => new Exact(cents).div(100).toFixed(2));
