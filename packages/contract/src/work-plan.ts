@@ -17,7 +17,11 @@ export const workStep = z.strictObject({
   secondsPerUnit: seconds,
   per: z.enum(stepUnits, 'Choose what the step is counted per.'),
   rejectPercent,
-  people: z.int('Enter a whole number.').min(1).max(20, 'Enter at most 20 people.').optional(),
+  people: z
+    .int('Enter a whole number.')
+    .min(1, 'Enter 1 or more people.')
+    .max(20, 'Enter at most 20 people.')
+    .optional(),
   /** Nobody stands by while it runs. */
   unattended: z.boolean().optional(),
   /** How long pieces must, and how long they may, lie before the next step. */

@@ -104,7 +104,7 @@ async function addVersion(
 
 async function requireParts(
   { em }: Work,
-  { leatherId, hardware }: PatternDefinition,
+  { leatherId, hardware, options = [] }: PatternDefinition,
 ): Promise<void> {
   const faults: FieldFault[] = [];
   if ((await em.count(Leather, { id: leatherId })) === 0) {
@@ -113,11 +113,21 @@ async function requireParts(
       message: 'This leather is not there. Choose one from the list.',
     });
   }
-  const known = await em.find(Hardware, { id: { $in: hardware.map((each) => each.hardwareId) } });
+  const named = [
+    ...hardware.map(({ hardwareId }) => hardwareId),
+    ...options.flatMap(({ swaps }) => swaps.flatMap(({ byHardwareId }) => byHardwareId ?? [])),
+  ];
+  const known = await em.find(Hardware, { id: { $in: named } });
+  const gone = (id: number | null) => id !== null && !known.some((each) => each.id === id);
+  const message = 'This hardware is not there. Choose one from the list.';
   hardware.forEach(({ hardwareId }, at) => {
-    if (known.some((each) => each.id === hardwareId)) return;
-    const field = `definition.hardware.${at}.hardwareId`;
-    faults.push({ field, message: 'This hardware is not there. Choose one from the list.' });
+    if (gone(hardwareId)) faults.push({ field: `definition.hardware.${at}.hardwareId`, message });
   });
+  options.forEach(({ swaps }, option) =>
+    swaps.forEach(({ byHardwareId }, at) => {
+      const field = `definition.options.${option}.swaps.${at}.byHardwareId`;
+      if (gone(byHardwareId)) faults.push({ field, message });
+    }),
+  );
   if (faults.length > 0) throw invalid(faults);
 }

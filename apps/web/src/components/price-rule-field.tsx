@@ -1,10 +1,9 @@
 import type { PriceRule } from '@hidewright/domain';
-import { ChevronDown } from 'lucide-react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { DecimalField } from './decimal-field.tsx';
 import { describedBy, Field, type FieldLabels } from './field.tsx';
-import { InputFrame, inputLook } from './input-frame.tsx';
 import { MoneyField } from './money-field.tsx';
+import { SelectInput } from './select-input.tsx';
 import { useField } from './use-field.ts';
 
 type Kind = PriceRule['kind'];
@@ -48,33 +47,25 @@ export function PriceRuleField({ name, emptyWord, ...labels }: PriceRuleFieldPro
   return (
     <div className="space-y-3">
       <Field id={id} error={error} {...labels}>
-        <InputFrame id={id} invalid={error !== undefined}>
-          <select
-            id={id}
-            name={`${name}.kind`}
-            value={rule?.kind ?? ''}
-            onChange={(event) => choose(event.target.value)}
-            aria-invalid={error !== undefined}
-            aria-describedby={describedBy(id, { help: labels.help, error })}
-            className={`${inputLook} -mr-8 appearance-none pr-9`}
-          >
-            {(emptyWord !== undefined || !rule) && (
-              <option value="" className="bg-card text-ink">
-                {emptyWord ?? 'Choose one'}
-              </option>
-            )}
-            {kinds.map((kind) => (
-              <option key={kind} value={kind} className="bg-card text-ink">
-                {words[kind]}
-              </option>
-            ))}
-          </select>
-          <ChevronDown
-            size={18}
-            aria-hidden="true"
-            className="pointer-events-none mr-2.5 shrink-0"
-          />
-        </InputFrame>
+        <SelectInput
+          id={id}
+          name={`${name}.kind`}
+          value={rule?.kind ?? ''}
+          onChange={(event) => choose(event.target.value)}
+          invalid={error !== undefined}
+          aria-describedby={describedBy(id, { help: labels.help, error })}
+        >
+          {(emptyWord !== undefined || !rule) && (
+            <option value="" className="bg-card text-ink">
+              {emptyWord ?? 'Choose one'}
+            </option>
+          )}
+          {kinds.map((kind) => (
+            <option key={kind} value={kind} className="bg-card text-ink">
+              {words[kind]}
+            </option>
+          ))}
+        </SelectInput>
       </Field>
       <Figure key={rule?.kind} name={name} kind={rule?.kind} />
     </div>

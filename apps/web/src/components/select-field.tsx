@@ -1,6 +1,5 @@
-import { ChevronDown } from 'lucide-react';
 import { describedBy, Field, type FieldLabels } from './field.tsx';
-import { InputFrame, inputLook } from './input-frame.tsx';
+import { SelectInput } from './select-input.tsx';
 import { emptied, useField, type WhenEmpty } from './use-field.ts';
 
 export interface Choice {
@@ -27,23 +26,20 @@ export function SelectField(props: SelectFieldProps) {
       : (choices.find((choice) => String(choice.value) === String(value))?.value ?? value);
   return (
     <Field id={id} error={error} {...labels}>
-      <InputFrame id={id} short={short} invalid={error !== undefined}>
-        <select
-          {...register(name, { setValueAs: read })}
-          id={id}
-          aria-invalid={error !== undefined}
-          aria-describedby={describedBy(id, { help: labels.help, error })}
-          className={`${inputLook} -mr-8 appearance-none pr-9`}
-        >
-          {placeholder !== undefined && <option value="">{placeholder}</option>}
-          {choices.map((choice) => (
-            <option key={choice.value} value={choice.value} className="bg-card text-ink">
-              {choice.label}
-            </option>
-          ))}
-        </select>
-        <ChevronDown size={18} aria-hidden="true" className="pointer-events-none mr-2.5 shrink-0" />
-      </InputFrame>
+      <SelectInput
+        {...register(name, { setValueAs: read })}
+        id={id}
+        short={short}
+        invalid={error !== undefined}
+        aria-describedby={describedBy(id, { help: labels.help, error })}
+      >
+        {placeholder !== undefined && <option value="">{placeholder}</option>}
+        {choices.map((choice) => (
+          <option key={choice.value} value={choice.value} className="bg-card text-ink">
+            {choice.label}
+          </option>
+        ))}
+      </SelectInput>
     </Field>
   );
 }

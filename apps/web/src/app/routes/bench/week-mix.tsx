@@ -1,5 +1,5 @@
 import type { WeekMixReply } from '@hidewright/contract';
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Card } from '../../../components/card.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
@@ -8,7 +8,7 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { MixAnswer } from '../../../features/week-mixes/components/mix-answer.tsx';
 import { WeekForm } from '../../../features/week-mixes/components/week-form.tsx';
 import { forgetWeek } from '../../../features/week-mixes/typed-week.ts';
-import { weekStartQuery } from '../../../features/week-mixes/week-mixes.queries.ts';
+import { firstMixQuery, weekStartQuery } from '../../../features/week-mixes/week-mixes.queries.ts';
 import { countText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 
@@ -19,7 +19,9 @@ export async function loader() {
 
 export function Component() {
   const { data: start } = useSuspenseQuery(weekStartQuery());
-  const [mix, setMix] = useState<WeekMixReply>();
+  const { data: first } = useQuery(firstMixQuery(start));
+  const [typed, setMix] = useState<WeekMixReply>();
+  const mix = typed ?? first;
   const [begun, setBegun] = useState(0);
   function startAfresh() {
     forgetWeek();
