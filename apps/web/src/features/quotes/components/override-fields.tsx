@@ -1,6 +1,7 @@
 import type { RunBasis } from '@hidewright/contract';
 import { goodShare } from '@hidewright/domain';
 import { DecimalField } from '../../../components/decimal-field.tsx';
+import { More } from '../../../components/more.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { percentText, unitPriceText } from '../../../lib/formatting.ts';
 
@@ -9,25 +10,22 @@ export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
   if (!basis) return null;
   const { leather } = basis.input;
   return (
-    <details>
-      <summary className="rounded py-1 font-semibold">Set by hand, for this quote alone</summary>
-      <div className="mt-3 space-y-4">
-        <MoneyField
-          name="overrides.leatherPricePerFt2"
-          label="Leather price"
-          per="ft²"
-          optional
-          help={`${leather.name} is ${unitPriceText(leather.pricePerFt2)} per ft².`}
-        />
-        <DecimalField
-          name="overrides.rejectPercent"
-          label="Rejects"
-          unit="%"
-          optional
-          help={`The pattern says ${percentText(rejectsOf(basis))}${basis.input.history ? ', and its own runs are counted with' : ''}.`}
-        />
-      </div>
-    </details>
+    <More word="Set by hand, for this quote alone" names={['overrides']}>
+      <MoneyField
+        name="overrides.leatherPricePerFt2"
+        label="Leather price"
+        per="ft²"
+        optional
+        help={`${leather.name} is ${unitPriceText(leather.pricePerFt2)} per ft².`}
+      />
+      <DecimalField
+        name="overrides.rejectPercent"
+        label="Rejects"
+        unit="%"
+        optional
+        help={`The pattern says ${percentText(rejectsOf(basis))}${basis.input.history ? ', and its own runs are counted with' : ''}.`}
+      />
+    </More>
   );
 }
 
