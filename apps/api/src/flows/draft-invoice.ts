@@ -96,7 +96,7 @@ async function writeLines(
     ...tax,
     invoiceId: invoice.id,
     position: 1,
-    description: order.optionName === null ? order.title : `${order.title}, ${order.optionName}`,
+    description: order.title,
     quantity: order.quantity,
     unitPrice: order.priceEach,
     amount: new Decimal(goods),

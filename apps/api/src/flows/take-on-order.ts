@@ -93,7 +93,8 @@ async function makeOrder(
     number: await drawPaperNumber(work.em, 'O'),
     quoteId: quote.id,
     customerId: quote.customerId,
-    title: quote.title,
+    // Whoever makes, packs or pays for it reads which option it is.
+    title: quote.agreedOption === null ? quote.title : `${quote.title}, ${quote.agreedOption}`,
     quantity: numbers.quantity,
     priceEach: new Decimal(numbers.priceEach),
     goodsTotal: new Decimal(numbers.goodsTotal),

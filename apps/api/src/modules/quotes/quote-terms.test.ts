@@ -138,6 +138,7 @@ describe('an option', () => {
     const order = (await owner().post('/api/orders').send(taken).expect(201)).body as Order;
     const offered = quote.numbers?.options[0]?.breaks.find((rung) => rung.quantity === 50);
     expect(order).toMatchObject({
+      title: 'Coasters with a bramble, Brass rivets',
       optionName: 'Brass rivets',
       total: offered?.total,
       charges: offered?.charges.map(({ name, amount }) => ({ name, amount })),

@@ -7,7 +7,7 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 /** What was agreed; nothing for those who get no prices. */
 export function OrderFigures({ order }: { order: Order }) {
   const { currency } = useWorkshop();
-  const { priceEach, goodsTotal, toolingCharge, charges = [], total, optionName } = order;
+  const { priceEach, goodsTotal, toolingCharge, charges = [], total } = order;
   if (
     priceEach === undefined ||
     goodsTotal === undefined ||
@@ -16,10 +16,7 @@ export function OrderFigures({ order }: { order: Order }) {
   )
     return null;
   return (
-    <Card
-      title="What was agreed"
-      subtitle={`${optionName === null ? '' : `${optionName}. `}In ${currency}, before tax`}
-    >
+    <Card title="What was agreed" subtitle={`In ${currency}, before tax`}>
       <KeyFigures
         figures={[
           { word: 'Price each', figure: unitPriceText(priceEach) },
