@@ -10,16 +10,22 @@ function unit(name: string, root: string): TestProjectInlineConfiguration {
 /** Whole programs started as processes: one at a time, since each wants a core and a half. */
 function whole(name: string, root: string, include: string): TestProjectInlineConfiguration {
   return {
-    test: {
-      name,
-      root,
-      include: [include],
-      fileParallelism: false,
-      testTimeout: 300_000,
-      hookTimeout: 600_000,
-    },
+    test: { name, root, include: [include], fileParallelism: false, ...longHang },
   };
 }
+
+const longHang = { testTimeout: 300_000, hookTimeout: 600_000 };
+
+/** Browser walks wait for pages most of their time, so two go side by side, on copies of one demo. */
+const walks: TestProjectInlineConfiguration = {
+  test: {
+    name: 'e2e',
+    root: 'tests/e2e',
+    include: ['**/*.e2e.ts'],
+    globalSetup: ['../support/made-demo.ts'],
+    ...longHang,
+  },
+};
 
 export default defineConfig({
   test: {
@@ -32,7 +38,7 @@ export default defineConfig({
       unit('lint', 'tests/lint'),
       unit('published', 'tests/published'),
       'apps/*/vitest.config.ts',
-      whole('e2e', 'tests/e2e', '**/*.e2e.ts'),
+      walks,
       whole('commands', 'tests/commands', '**/*.test.ts'),
       whole('sheets', 'tests/sheets', '**/*.test.ts'),
       whole('drills', 'tests/drills', '**/*.drill.ts'),

@@ -2,7 +2,8 @@ import { afterAll, afterEach, beforeEach, expect } from 'vitest';
 import type { Page } from 'playwright-core';
 import { browser, closeBrowser, phone, watch, wide } from '../support/browser.ts';
 import { keyboardAlone, mouse, type Hands } from '../support/hands.ts';
-import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import type { Hidewright } from '../support/hidewright.ts';
+import { startDemo } from '../support/made-demo.ts';
 import { mailThat } from '../support/mailbox.ts';
 import { settled, type Role } from '../support/steps.ts';
 import { expectAccessible, idIn, visit, walk } from '../support/walk.ts';
@@ -14,7 +15,7 @@ let complaints: string[];
 let hands: Hands;
 
 beforeEach(async () => {
-  hidewright = await startHidewright();
+  hidewright = await startDemo();
   complaints = [];
 });
 afterEach(() => hidewright.stop());

@@ -2,14 +2,15 @@ import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
 import { keyboardAlone } from '../support/hands.ts';
-import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import type { Hidewright } from '../support/hidewright.ts';
 import { photoOfSide, photoRule } from '../support/picture.ts';
+import { startDemo } from '../support/made-demo.ts';
 import { signInAs } from '../support/steps.ts';
 import { expectAccessible, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
-  hidewright = await startHidewright();
+  hidewright = await startDemo();
 });
 afterAll(async () => {
   await closeBrowser();

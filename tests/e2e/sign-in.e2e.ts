@@ -1,12 +1,13 @@
 import { afterAll, beforeAll } from 'vitest';
 import { closeBrowser } from '../support/browser.ts';
-import { startHidewright, type Hidewright } from '../support/hidewright.ts';
+import type { Hidewright } from '../support/hidewright.ts';
+import { startDemo } from '../support/made-demo.ts';
 import { settled } from '../support/steps.ts';
 import { expectAccessible, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
-  hidewright = await startHidewright();
+  hidewright = await startDemo();
 });
 afterAll(async () => {
   await closeBrowser();
