@@ -1,3 +1,4 @@
+import path from 'node:path';
 import { defineConfig, type TestProjectInlineConfiguration } from 'vitest/config';
 
 /** Time limits are for hangs only; speed is measured by the benches. */
@@ -22,7 +23,7 @@ const walks: TestProjectInlineConfiguration = {
     name: 'e2e',
     root: 'tests/e2e',
     include: ['**/*.e2e.ts'],
-    globalSetup: ['../support/made-demo.ts'],
+    globalSetup: [path.resolve(import.meta.dirname, 'tests/support/made-demo.ts')],
     ...longHang,
   },
 };
