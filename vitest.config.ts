@@ -17,12 +17,13 @@ function whole(name: string, root: string, include: string): TestProjectInlineCo
 
 const longHang = { testTimeout: 300_000, hookTimeout: 600_000 };
 
-/** Browser walks wait for pages most of their time, so two go side by side, on copies of one demo. */
+/** Browser walks, each on a copy of one demo. */
 const walks: TestProjectInlineConfiguration = {
   test: {
     name: 'e2e',
     root: 'tests/e2e',
     include: ['**/*.e2e.ts'],
+    fileParallelism: false,
     globalSetup: [path.resolve(import.meta.dirname, 'tests/support/made-demo.ts')],
     ...longHang,
   },

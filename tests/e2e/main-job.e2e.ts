@@ -1,6 +1,6 @@
 import { afterAll, afterEach, beforeEach, expect } from 'vitest';
 import type { Page } from 'playwright-core';
-import { browser, closeBrowser, phone, watch, wide } from '../support/browser.ts';
+import { browser, closeBrowser, phone, still, watch, wide } from '../support/browser.ts';
 import { keyboardAlone, mouse, type Hands } from '../support/hands.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
@@ -23,7 +23,7 @@ afterAll(closeBrowser);
 
 /** A browser of this person's own, at the width they work at. */
 async function desk(role: Role, viewport = wide): Promise<Page> {
-  const context = await (await browser()).newContext({ viewport, acceptDownloads: true });
+  const context = await (await browser()).newContext({ ...still, viewport, acceptDownloads: true });
   const page = await context.newPage();
   complaints = watch(page);
   await page.goto(`${hidewright.url}/sign-in`);
@@ -81,7 +81,7 @@ async function customerAgrees(number: string): Promise<void> {
   const mail = await mailThat(hidewright.mailboxUrl, ({ subject }) => subject.includes(number));
   expect(mail.to).toContain('taproom@brambling.example.com');
   const link = mail.links.find((each) => each.includes('/c/'));
-  const context = await (await browser()).newContext({ viewport: phone });
+  const context = await (await browser()).newContext({ ...still, viewport: phone });
   const page = await context.newPage();
   complaints = watch(page);
   await page.goto(link ?? '');

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, expect } from 'vitest';
-import { browser, closeBrowser, phone, watch } from '../support/browser.ts';
+import { browser, closeBrowser, phone, still, watch } from '../support/browser.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
 import { settled, signInAs } from '../support/steps.ts';
@@ -79,7 +79,7 @@ walk('a quote with terms and an option, from its workings to the order', async (
 
 /** The customer, on a phone: chooses the option and the quantity, sees what is charged once, agrees. */
 async function agreeAsCustomer(linkUrl: string): Promise<void> {
-  const context = await (await browser()).newContext({ viewport: phone });
+  const context = await (await browser()).newContext({ ...still, viewport: phone });
   const page = await context.newPage();
   const heard = watch(page);
   await page.goto(linkUrl);

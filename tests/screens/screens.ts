@@ -2,7 +2,7 @@ import { mkdir, rm, writeFile } from 'node:fs/promises';
 import path from 'node:path';
 import { AxeBuilder } from '@axe-core/playwright';
 import type { BrowserContext, Page } from 'playwright-core';
-import { browser, closeBrowser, phone, watch, wide } from '../support/browser.ts';
+import { browser, closeBrowser, phone, still, watch, wide } from '../support/browser.ts';
 import { startHidewright } from '../support/hidewright.ts';
 import { mailThat } from '../support/mailbox.ts';
 import { settled, signInAs, type Role } from '../support/steps.ts';
@@ -55,6 +55,7 @@ async function context(
   colorScheme: 'light' | 'dark',
 ): Promise<BrowserContext> {
   return (await browser()).newContext({
+    ...still,
     baseURL,
     viewport: widths[width],
     colorScheme,

@@ -16,6 +16,9 @@ const flags = [
 
 let running: Promise<Browser> | undefined;
 
+/** Nothing fades in or out: halfway through, words have too little contrast to be read. */
+export const still = { reducedMotion: 'reduce' } as const;
+
 /** One browser for all tests of a file. */
 export function browser(): Promise<Browser> {
   running ??= launch();

@@ -1,7 +1,7 @@
 import { AxeBuilder } from '@axe-core/playwright';
 import type { Page } from 'playwright-core';
 import { expect, test } from 'vitest';
-import { browser, watch, wide } from './browser.ts';
+import { browser, still, watch, wide } from './browser.ts';
 import { settled } from './steps.ts';
 
 interface Walk {
@@ -14,7 +14,7 @@ interface Walk {
 export const walk = test.extend<Walk>({
   complaints: async ({}, use) => use([]),
   page: async ({ complaints }, use) => {
-    const context = await (await browser()).newContext({ viewport: wide });
+    const context = await (await browser()).newContext({ ...still, viewport: wide });
     const page = await context.newPage();
     const heard = watch(page);
     await use(page);
