@@ -3,7 +3,7 @@ import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 import { definitionOf } from '../modules/patterns/pattern-versions.ts';
-import { numbersOfQuote } from '../modules/quotes/quote-numbers.ts';
+import { numbersOfQuote, rungsOf } from '../modules/quotes/quote-numbers.ts';
 import type { Quote } from '../modules/quotes/quote.entity.ts';
 
 /** A step as the job will have it. */
@@ -77,7 +77,7 @@ function forOne(quote: Quote, quantity: number, optionName: string | null): RunI
   const numbers = numbersOfQuote(quote);
   const input = quote.input as RunInput;
   const option = input.options?.find(({ name }) => name === optionName);
-  const breaks = numbers.options.find(({ name }) => name === optionName)?.breaks ?? numbers.breaks;
+  const breaks = rungsOf(numbers, optionName);
   const typedPrice = breaks.find((each) => each.quantity === quantity)?.priceEach ?? null;
   return {
     ...input,

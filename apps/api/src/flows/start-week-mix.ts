@@ -3,6 +3,7 @@ import { daysBetween, type RunInput, type RunNumbers } from '@hidewright/domain'
 import { Decimal } from 'decimal.js';
 import { moneyText } from '../http/decimal-text.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
+import { rungsOf } from '../modules/quotes/quote-numbers.ts';
 import type { Work } from '../work.ts';
 
 /** How far back runs still say how often they come. */
@@ -41,10 +42,12 @@ interface Row {
   quantity: number;
   input: string;
   numbers: string;
+  optionName: string | null;
   minutes: number;
 }
 
-const finished = `SELECT p.name AS patternName, substr(j.finished_at, 1, 10) AS finishedOn, o.quantity, q.input, q.numbers,
+const finished = `SELECT p.name AS patternName, substr(j.finished_at, 1, 10) AS finishedOn, o.quantity, o.option_name AS optionName, q.input,
+    q.numbers,
     (SELECT COALESCE(SUM(minutes), 0) FROM job_step WHERE job_id = j.id) AS minutes
   FROM job j JOIN customer_order o ON o.id = j.order_id JOIN quote q ON q.id = o.quote_id
     JOIN pattern_version v ON v.id = j.pattern_version_id JOIN pattern p ON p.id = v.pattern_id
@@ -64,7 +67,7 @@ interface FinishedRun {
 
 /** A run without logged minutes says nothing of an hour. */
 function readRun(row: Row): FinishedRun[] {
-  const rungs = (JSON.parse(row.numbers) as RunNumbers).breaks;
+  const rungs = rungsOf(JSON.parse(row.numbers) as RunNumbers, row.optionName);
   const rung = rungs.find(({ quantity }) => quantity === row.quantity);
   if (rung === undefined || row.minutes <= 0) return [];
   const { deskMinutesPerOrder } = JSON.parse(row.input) as RunInput;

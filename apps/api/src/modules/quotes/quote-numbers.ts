@@ -1,4 +1,4 @@
-import { priceRun, type RunInput, type RunNumbers } from '@hidewright/domain';
+import { priceRun, type BreakNumbers, type RunInput, type RunNumbers } from '@hidewright/domain';
 import type { Quote } from './quote.entity.ts';
 
 /**
@@ -8,4 +8,12 @@ import type { Quote } from './quote.entity.ts';
 export function numbersOfQuote(quote: Pick<Quote, 'input' | 'numbers'>): RunNumbers {
   const kept = quote.numbers as RunNumbers | Pick<RunNumbers, 'breaks'>;
   return 'options' in kept ? kept : priceRun(quote.input as RunInput);
+}
+
+/** The rungs of an option, or of the piece as it is. Numbers of an earlier release have no options. */
+export function rungsOf(
+  numbers: Pick<RunNumbers, 'breaks'> & Partial<RunNumbers>,
+  option: string | null,
+): BreakNumbers[] {
+  return numbers.options?.find(({ name }) => name === option)?.breaks ?? numbers.breaks;
 }

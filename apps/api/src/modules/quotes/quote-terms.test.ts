@@ -7,6 +7,7 @@ import {
   type Order,
   type Pattern,
   type Quote,
+  type QuoteRow,
   type RunBasis,
 } from '@hidewright/contract';
 import { priceRun } from '@hidewright/domain';
@@ -137,6 +138,9 @@ describe('an option', () => {
     const taken = { quoteId: quote.id, promisedOn: '2026-12-16' };
     const order = (await owner().post('/api/orders').send(taken).expect(201)).body as Order;
     const offered = quote.numbers?.options[0]?.breaks.find((rung) => rung.quantity === 50);
+    const listed = await owner().get('/api/quotes?state=agreed').expect(200);
+    const row = (listed.body.items as QuoteRow[]).find(({ id }) => id === quote.id);
+    expect(row?.total).toBe(offered?.total);
     expect(order).toMatchObject({
       title: 'Coasters with a bramble, Brass rivets',
       optionName: 'Brass rivets',

@@ -40,8 +40,13 @@ const chosen = `
     v.pattern_id, p.name AS pattern_name, q.title, q.in_hands_on, q.valid_until, q.created_at,
     q.sent_at, q.agreed_at, q.agreed_quantity, q.agreed_how, o.id AS order_id, o.number AS order_number,
     (SELECT json_group_array(quantity) FROM (SELECT quantity FROM quote_break WHERE quote_id = q.id ORDER BY quantity)) AS quantities,
-    (SELECT total FROM quote_break WHERE quote_id = q.id
-      ORDER BY quantity = q.agreed_quantity DESC, quantity DESC LIMIT 1) AS total
+    COALESCE(
+      (SELECT CAST(ROUND(json_extract(rung.value, '$.total') * 100) AS INTEGER)
+        FROM json_each(q.numbers, '$.options') option, json_each(option.value, '$.breaks') rung
+        WHERE json_extract(option.value, '$.name') = q.agreed_option
+          AND json_extract(rung.value, '$.quantity') = q.agreed_quantity),
+      (SELECT total FROM quote_break WHERE quote_id = q.id
+        ORDER BY quantity = q.agreed_quantity DESC, quantity DESC LIMIT 1)) AS total
   FROM quote q
   JOIN customer c ON c.id = q.customer_id
   JOIN pattern_version v ON v.id = q.pattern_version_id
