@@ -4,7 +4,7 @@ import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
 import { openShop, settled } from '../support/steps.ts';
-import { expectAccessible, walk } from '../support/walk.ts';
+import { expectAccessible, expectNoOverflow, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
@@ -61,8 +61,7 @@ walk('an outline from a drawing: refused, mended, sized, kept, and printed', asy
   await expectAccessible(page);
   await page.setViewportSize(phone);
   await expectAccessible(page);
-  const overflow = () => document.documentElement.scrollWidth - window.innerWidth;
-  expect(await page.evaluate(overflow)).toBeLessThanOrEqual(0);
+  await expectNoOverflow(page);
 
   // Another shape and back: the file is still open, and what was ticked is ticked.
   await page.getByRole('radio', { name: 'Oval' }).check();

@@ -4,7 +4,7 @@ import { closeBrowser, phone, wide } from '../support/browser.ts';
 import { keyboardAlone } from '../support/hands.ts';
 import { startHidewright, type Hidewright } from '../support/hidewright.ts';
 import { openShop, settled } from '../support/steps.ts';
-import { expectAccessible, visit, walk } from '../support/walk.ts';
+import { expectAccessible, expectNoOverflow, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
@@ -140,8 +140,7 @@ const open = (page: Page, word: string) =>
 async function expectSoundAtBothWidths(page: Page): Promise<void> {
   for (const viewport of [phone, wide]) {
     await page.setViewportSize(viewport);
-    const overflow = () => document.documentElement.scrollWidth - window.innerWidth;
-    expect(await page.evaluate(overflow), `${viewport.width}`).toBeLessThanOrEqual(0);
+    await expectNoOverflow(page);
     await expectAccessible(page);
   }
 }

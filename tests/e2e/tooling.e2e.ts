@@ -3,7 +3,7 @@ import { closeBrowser, phone } from '../support/browser.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
 import { settled, signInAs } from '../support/steps.ts';
-import { expectAccessible, visit, walk } from '../support/walk.ts';
+import { expectAccessible, expectNoOverflow, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
@@ -54,11 +54,7 @@ walk('which metal for a run and its repeats, and whether the plate lasts', async
   await page.setViewportSize(phone);
   await settled(page);
   await expectAccessible(page);
-  const { scroll, wide } = await page.evaluate(() => ({
-    scroll: document.documentElement.scrollWidth,
-    wide: document.documentElement.clientWidth,
-  }));
-  expect(scroll).toBeLessThanOrEqual(wide);
+  await expectNoOverflow(page);
 });
 
 walk('a customer’s own plate is kept for its term, and given back', async ({ page }) => {

@@ -48,3 +48,20 @@ export function idIn(address: string): number {
   expect(id, address).toBeGreaterThan(0);
   return id;
 }
+
+/** The page is no wider than its window, once it has taken in the window's width. */
+export async function expectNoOverflow(page: Page): Promise<void> {
+  const tooWide = () =>
+    page.evaluate(() => {
+      const { scrollWidth, clientWidth } = document.documentElement;
+      if (scrollWidth <= clientWidth) return [];
+      const out = [...document.querySelectorAll('body *')].filter(
+        (each) => each.getBoundingClientRect().right > clientWidth + 0.5,
+      );
+      return [
+        `${scrollWidth} > ${clientWidth}`,
+        ...out.slice(-3).map((each) => each.outerHTML.slice(0, 200)),
+      ];
+    });
+  await expect.poll(tooWide, { timeout: 5000 }).toEqual([]);
+}
