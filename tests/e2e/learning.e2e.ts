@@ -5,7 +5,7 @@ import { keyboardAlone } from '../support/hands.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
 import { settled, signInAs } from '../support/steps.ts';
-import { expectAccessible, visit, walk } from '../support/walk.ts';
+import { expectAccessible, expectNoOverflow, visit, walk } from '../support/walk.ts';
 
 let hidewright: Hidewright;
 beforeAll(async () => {
@@ -41,6 +41,19 @@ walk('what the last runs say becomes the next estimate', async ({ page }) => {
   await keyboardAlone.press(page.getByRole('button', { name: 'Use these' }));
   await page.getByText(/goes by its last runs as version 2/).waitFor();
   await page.getByText('Version 2 says the same already.').waitFor();
+
+  // One customer's runs alone, for that customer's quotes alone.
+  const whose = page.getByLabel('Runs of');
+  const theirs = await whose.locator('option').nth(1).innerText();
+  const customer = theirs.replace(/, \d+ runs?$/, '');
+  await whose.selectOption({ label: theirs });
+  await keyboardAlone.press(page.getByRole('button', { name: /^Use/ }));
+  await page.getByText(`Quotes for ${customer} go by their own runs from now on.`).waitFor();
+  await page.getByText(/go by their own \d+ runs?, since/).waitFor();
+  await expectAccessible(page);
+  await expectNoOverflow(page);
+  await page.getByRole('button', { name: 'Go by the pattern again' }).click();
+  await page.getByText(`Quotes for ${customer} go by the pattern again.`).waitFor();
 
   await page.getByRole('link', { name: /^J-/ }).first().click();
   await page.getByText('Why it differs, step by step').click();

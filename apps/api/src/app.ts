@@ -13,6 +13,7 @@ import { sameOrigin } from './http/same-origin.ts';
 import { sessions } from './http/session.ts';
 import { activityRoutes } from './modules/activity/activity.routes.ts';
 import { customerRoutes } from './modules/customers/customers.routes.ts';
+import { designRoutes } from './modules/designs/designs.routes.ts';
 import { hardwareRoutes } from './modules/hardware/hardware.routes.ts';
 import { invoiceRoutes } from './modules/invoices/invoices.routes.ts';
 import { jobRoutes } from './modules/jobs/jobs.routes.ts';
@@ -58,6 +59,7 @@ const rooms: ((context: Context) => Router)[] = [
   orderRoutes,
   patternRoutes,
   learnedRoutes,
+  designRoutes,
   timeReadingRoutes,
   layoutRoutes,
   toolRoutes,

@@ -2,6 +2,7 @@ import * as activity from './activity.ts';
 import * as benchHours from './bench-hours.ts';
 import * as customers from './customers.ts';
 import * as cutAdvice from './cut-advice.ts';
+import * as designs from './designs.ts';
 import type { Endpoint } from './endpoint.ts';
 import * as hardware from './hardware.ts';
 import * as invoices from './invoices.ts';
@@ -51,6 +52,7 @@ const rooms: Record<string, unknown>[] = [
   learned,
   timeReadings,
   cutAdvice,
+  designs,
   layouts,
   tools,
   plateOffers,

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
+import { design } from './designs.ts';
 import { endpoint } from './endpoint.ts';
 import { count, day, id, idParams, paperNumber, version, workedOut } from './fields.ts';
 import { stepUnits } from './work-plan.ts';
@@ -19,6 +20,7 @@ const pastRun = z.object({
   /** Null where nobody counted at the bench: then nothing is known of them. */
   rejects: count.nullable(),
   rejectPercent: workedOut.nullable(),
+  customerName: z.string(),
   /** Leather that was used for each good piece; null where none was taken. */
   leatherPerGoodMm2: workedOut.nullable(),
   /** Why it looks unlike the others; it counts all the same, unless it is left out. */
@@ -61,12 +63,26 @@ const learnedStep = z.object({
 });
 export type LearnedStep = z.infer<typeof learnedStep>;
 
+const pooledLeather = z.object({
+  extraPercent: workedOut,
+  leastPercent: workedOut,
+  mostPercent: workedOut,
+  runs: count,
+});
+
+const pooledLosses = z.object({ percent: workedOut, needed: count, taken: count, runs: count });
+
 /** What the last finished runs of a pattern say its next estimate should be. */
 export const learned = z
   .object({
     patternId: id,
     patternName: z.string(),
     versionNumber: count,
+    /** Whose runs these are: one customer's, or everybody's. */
+    customerId: id.nullable(),
+    customers: z.array(z.object({ id, name: z.string(), runs: count })),
+    /** That this customer's quotes go by their own runs, and since when. */
+    design: design.nullable(),
     /** The pattern's way of working: one figure, or step by step. */
     by: z.enum(['minutesPer100', 'steps']),
     /** Newest first. */
@@ -76,8 +92,23 @@ export const learned = z
     /** One for each step of the pattern as it is now; none where it has one figure. */
     steps: z.array(learnedStep),
     /** For each good piece: as the layout and the reject rate have it, and as it was. */
-    leather: z.object({ saidMm2: workedOut.nullable(), foundMm2: workedOut.nullable() }),
-    hardware: z.array(z.object({ name: z.string(), said: count, found: workedOut.nullable() })),
+    leather: z.object({
+      saidMm2: workedOut.nullable(),
+      foundMm2: workedOut.nullable(),
+      /** On top of the layout, per cent. */
+      saidExtraPercent: workedOut,
+      extra: pooledLeather.nullable(),
+    }),
+    hardware: z.array(
+      z.object({
+        hardwareId: id,
+        name: z.string(),
+        said: count,
+        found: workedOut.nullable(),
+        saidLossPercent: workedOut,
+        losses: pooledLosses.nullable(),
+      }),
+    ),
     /** What leather and hardware of each good piece really took from the stock's worth. */
     money: confidential(
       z.object({ leatherPerGood: workedOut.nullable(), hardwarePerGood: workedOut.nullable() }),
@@ -105,25 +136,34 @@ export const readLearned = endpoint({
   summary: 'What the last runs of a pattern say its next estimate should be',
   access: ['owner', 'maker'],
   params: idParams,
-  query: z.strictObject({ without: without.optional() }),
+  query: z.strictObject({
+    without: without.optional(),
+    /** Only this customer's runs. */
+    customerId: z.coerce.number().int().positive().optional(),
+  }),
   reply: learned,
 });
 
 export const takeLearned = endpoint({
   method: 'POST',
   path: '/patterns/{id}/learned',
-  summary: 'Make what the last runs say a new version of the pattern, all of it or part',
+  summary:
+    'Make what the last runs say a new version of the pattern, or the estimate of one customer’s design',
   access: ['owner'],
   edits: true,
   params: idParams,
   body: z.strictObject({
     without: z.array(id).max(mostRuns).default([]),
+    /** For this customer's design only; the pattern stays as it is. */
+    customerId: id.nullable().default(null),
     take: z
       .array(
         z.strictObject({
-          what: z.enum(['minutes', 'rejects']),
+          what: z.enum(['minutes', 'rejects', 'leather', 'hardware']),
           /** Which step, from 1; null where the pattern has one figure for all of it. */
           step: z.int().positive().max(40).nullable(),
+          /** Which hardware, where it is that. */
+          hardwareId: id.nullable().default(null),
         }),
       )
       .min(1, 'Choose at least one figure to use.')

@@ -68,6 +68,10 @@ export const patternDefinition = z
   .strictObject({
     ...layoutFields,
     leatherId: z.int('Choose a leather.').positive('Choose a leather.'),
+    /** What runs take on top of the layout, for flaws and what is cut away around them. */
+    leatherExtraPercent: percent
+      .refine((text) => Number(text) <= 200, 'Enter at most 200 %.')
+      .optional(),
     hardware: z.array(hardwareLine).max(40, 'Keep it to 40 lines of hardware.'),
     supplies: z.array(supplyLine).max(20, 'Keep it to 20 lines of supplies.').optional(),
     options: z.array(patternOption).max(6, 'Keep it to 6 options.').optional(),

@@ -1,10 +1,19 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
-import { email, id, idParams, line, version } from './fields.ts';
+import { email, id, idParams, line, money, version } from './fields.ts';
 import { newPassword, role } from './session.ts';
 
 export const person = z
-  .object({ id, name: z.string(), email: z.string(), role, active: z.boolean(), version })
+  .object({
+    id,
+    name: z.string(),
+    email: z.string(),
+    role,
+    active: z.boolean(),
+    /** What an hour of theirs is paid; null where it is the shop's wage. */
+    wagePerHour: z.string().nullable(),
+    version,
+  })
   .meta({ id: 'Person' });
 export type Person = z.infer<typeof person>;
 
@@ -35,6 +44,6 @@ export const changePerson = endpoint({
   access: ['owner'],
   edits: true,
   params: idParams,
-  body: z.strictObject({ ...typed, active: z.boolean() }).partial(),
+  body: z.strictObject({ ...typed, active: z.boolean(), wagePerHour: money.nullable() }).partial(),
   reply: person,
 });

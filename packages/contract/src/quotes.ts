@@ -1,6 +1,7 @@
 import type { RunHardware, RunInput, RunNumbers } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
+import { design } from './designs.ts';
 import { domainRecord } from './domain-record.ts';
 import { endpoint } from './endpoint.ts';
 import {
@@ -152,6 +153,8 @@ export const runBasis = z
     outlinePath: z.string().nullable(),
     needsDie: z.boolean(),
     needsPlate: z.boolean(),
+    /** Set where the customer's own runs stand in for what the pattern says. */
+    design: design.nullable(),
     /** The pattern's options, each with its whole hardware. */
     options: z.array(
       z.object({ name: z.string(), hardware: domainRecord<RunHardware[]>('RunHardware') }),
@@ -168,6 +171,8 @@ export const readRunBasis = endpoint({
   summary: 'What a run of a pattern is priced from today',
   access: ['owner'],
   params: idParams,
+  /** Whose design of it, where they have one. */
+  query: z.strictObject({ customerId: z.coerce.number().int().positive().optional() }),
   reply: runBasis,
 });
 

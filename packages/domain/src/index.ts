@@ -121,6 +121,8 @@ export * from './compare/compare-run.ts';
 export * from './compare/bought-variances.ts';
 export * from './compare/time-variances.ts';
 export * from './learn/match-steps.ts';
+export * from './learn/pool-leather.ts';
+export * from './learn/pool-losses.ts';
 export * from './learn/pool-minutes.ts';
 export * from './learn/pool-shares.ts';
 export * from './learn/pool-step-time.ts';

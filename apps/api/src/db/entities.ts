@@ -2,6 +2,7 @@ import { IdempotentReply } from '../http/idempotency.entity.ts';
 import { Activity } from '../modules/activity/activity.entity.ts';
 import { Customer } from '../modules/customers/customer.entity.ts';
 import { StoredFile } from '../modules/files/stored-file.entity.ts';
+import { Design } from '../modules/designs/design.entity.ts';
 import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { InvoiceLine } from '../modules/invoices/invoice-line.entity.ts';
 import { InvoiceTax } from '../modules/invoices/invoice-tax.entity.ts';
@@ -46,6 +47,7 @@ export const entities = [
   Counter,
   Customer,
   CustomerLink,
+  Design,
   Hardware,
   IdempotentReply,
   Impression,

@@ -18,7 +18,6 @@ export function compareMoney(input: RunInput, numbers: BreakNumbers, used: Used)
       .reduce((sum, { amount }) => sum.plus(amount), new Decimal(0));
   const leather = used.leatherCost ?? (said('leather').isZero() ? new Decimal(0) : null);
   const hardware = used.hardwareCost ?? (said('hardware').isZero() ? new Decimal(0) : null);
-  const wages = used.minutes?.times(input.wagePerHour).dividedBy(60) ?? null;
   const left =
     leather === null || hardware === null
       ? null
@@ -29,10 +28,10 @@ export function compareMoney(input: RunInput, numbers: BreakNumbers, used: Used)
   return [
     row('Leather', said('leather'), leather),
     row('Hardware', said('hardware'), hardware),
-    row('Bench wages', said('wages'), wages),
+    row('Bench wages', said('wages'), used.wages),
     row('Left after everything bought', numbers.left, left),
     row('Per bench hour', numbers.perBenchHour, perBenchHour(left, used.minutes)),
-    row('Per hour all in', numbers.perHourAllIn, perHourAllIn(input, left, used.minutes)),
+    row('Per hour all in', numbers.perHourAllIn, perHourAllIn(input, left, used)),
   ];
 }
 
@@ -50,11 +49,12 @@ function perBenchHour(left: Decimal | null, minutes: Decimal | null): Decimal | 
 function perHourAllIn(
   input: RunInput,
   left: Decimal | null,
-  minutes: Decimal | null,
+  { minutes, wages: paid }: Used,
 ): Decimal | null {
-  if (left === null || minutes === null) return null;
+  if (left === null || minutes === null || paid === null) return null;
   const all = minutes.plus(input.deskMinutesPerOrder);
-  const wages = all.times(input.wagePerHour).dividedBy(60);
+  const desk = new Decimal(input.deskMinutesPerOrder).times(input.wagePerHour).dividedBy(60);
+  const wages = paid.plus(desk);
   const overhead = minutes.times(input.overheadPerHour ?? 0).dividedBy(60);
   return left.minus(wages).minus(overhead).times(60).dividedBy(all);
 }

@@ -24,7 +24,7 @@ import { usedBy, type Used } from './used-by-job.ts';
 
 /**
  * Why a finished job took and cost other than was said: time by step, leather and each hardware by price, usage and
- * pieces made. What a bench hour was really paid is not recorded, so wages differ by time alone.
+ * pieces made. An hour was paid what whoever logged it is paid; where nobody said, the wage of the estimate.
  * @throws {Problem} 404, 409 while it is not finished
  */
 export async function explainJob({ em }: Work, jobId: number): Promise<JobVariances> {
@@ -77,7 +77,7 @@ function explainTime(
       : timeVariances({
           steps: times,
           saidWagePerHour: input.wagePerHour,
-          wasWagePerHour: input.wagePerHour,
+          wasWagePerHour: wagePaid(used) ?? input.wagePerHour,
           saidCost: saidCost(numbers, 'wages'),
           places: 2,
         });
@@ -94,6 +94,10 @@ function explainTime(
     wages: wages === null ? null : { other: wages.other, sum: wages.sum },
   };
 }
+
+/** What an hour was paid on average, to the ten-thousandth. */
+const wagePaid = ({ wages, minutes }: Used): string | null =>
+  wages === null || minutes === null ? null : toAtMost(wages.times(60).div(minutes), 4);
 
 /** Where a step was not counted, all that could pass has passed: the job is finished. */
 function handledOf(step: JobStep, limit: number): number {

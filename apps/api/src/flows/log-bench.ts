@@ -5,6 +5,7 @@ import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
 import { handledIn, stepLimits } from '../modules/jobs/step-limits.ts';
+import { Person } from '../modules/people/person.entity.ts';
 import type { Work } from '../work.ts';
 import { startIfReady } from './start-job.ts';
 
@@ -45,6 +46,7 @@ export async function logBench(work: Work, jobId: number, entry: BenchEntry): Pr
     day: work.today,
     personId: work.actor.id,
     personName: work.actor.name,
+    wagePerHour: await wageOf(work),
   });
   step.good += good;
   step.rejects += rejects;
@@ -52,6 +54,11 @@ export async function logBench(work: Work, jobId: number, entry: BenchEntry): Pr
   step.minutes = step.minutes.plus(minutes);
   await work.em.flush();
   return job;
+}
+
+async function wageOf({ em, actor }: Work): Promise<Decimal | null> {
+  const person = actor.id === null ? null : await em.findOne(Person, actor.id);
+  return person?.wagePerHour ?? null;
 }
 
 function refuseAny(faults: FieldFault[]): void {

@@ -49,6 +49,9 @@ export async function runAsItStands(
       leather: {
         name: leather.name,
         pricePerFt2: priceText(leather.pricePerFt2),
+        ...(definition.leatherExtraPercent !== undefined && {
+          extraPercent: definition.leatherExtraPercent,
+        }),
         whole: wholeOf(leather),
       },
       hardware: definition.hardware.flatMap((line) => hardwareLine(kinds, line)),

@@ -1,14 +1,18 @@
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
+import { BenchLog } from '../modules/jobs/bench-log.entity.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
 import { minutesLogged } from '../modules/jobs/minutes-logged.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
+import { estimateOf } from './job-estimate.ts';
 
 /** What a job really used; null where nothing was logged that could say it. */
 export interface Used {
   minutes: Decimal | null;
+  /** What those minutes were paid: each at the wage of whoever logged it, else at the estimate's. */
+  wages: Decimal | null;
   leatherAreaMm2: string | null;
   leatherCost: Decimal | null;
   hardwareCount: number | null;
@@ -22,11 +26,22 @@ export async function usedBy(em: EntityManager, job: Job, steps: JobStep[]): Pro
   const minutes = new Decimal(minutesLogged(steps));
   return {
     minutes: minutes.isZero() ? null : minutes,
+    wages: minutes.isZero() ? null : await wagesOf(em, job, steps),
     leatherAreaMm2: leather.length === 0 ? null : unscaled(taken(leather), 3).toString(),
     leatherCost: leather.length === 0 ? null : costOf(leather),
     hardwareCount: hardware.length === 0 ? null : taken(hardware),
     hardwareCost: hardware.length === 0 ? null : costOf(hardware),
   };
+}
+
+async function wagesOf(em: EntityManager, job: Job, steps: readonly JobStep[]): Promise<Decimal> {
+  const { wagePerHour } = estimateOf(job).input;
+  const logs = await em.find(BenchLog, { jobStepId: { $in: steps.map(({ id }) => id) } });
+  const paid = logs.reduce(
+    (sum, log) => sum.plus(log.minutes.times(log.wagePerHour ?? wagePerHour)),
+    new Decimal(0),
+  );
+  return paid.div(60);
 }
 
 const taken = (moved: readonly StockMovement[]): number =>

@@ -3,6 +3,7 @@ import type { QuoteBody } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
 import { invalid } from '../http/problem.ts';
 import { Customer } from '../modules/customers/customer.entity.ts';
+import { definitionFor } from '../modules/designs/read-designs.ts';
 import { keepLayoutId } from '../modules/layouts/stored-layouts.ts';
 import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
 import type { Quote } from '../modules/quotes/quote.entity.ts';
@@ -36,7 +37,11 @@ export async function workOutQuote(
   await requireCustomer(work, asked.customerId);
   requireToCome(work, asked.inHandsOn);
   const layoutId = await keepLayoutId(work, laid.worked);
-  const input = await runInputFor(work, laid.definition, laid.worked.layout, asked);
+  const { definition } = await definitionFor(work.em, laid.definition, {
+    patternId: laid.patternId,
+    customerId: asked.customerId,
+  });
+  const input = await runInputFor(work, definition, laid.worked.layout, asked);
   return {
     customerId: asked.customerId,
     patternVersionId: laid.versionId,

@@ -5,6 +5,7 @@ import { TheTimeStudy } from './migration-20261201-the-time-study.ts';
 import { TheTools } from './migration-20261201-the-tools.ts';
 import { TheWorkings } from './migration-20261201-the-workings.ts';
 import { ThePhotos } from './migration-20261202-the-photos.ts';
+import { TheDesigns } from './migration-20261203-the-designs.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -15,4 +16,5 @@ export const migrations = [
   { name: 'migration-20261201-the-tools', class: TheTools },
   { name: 'migration-20261201-the-workings', class: TheWorkings },
   { name: 'migration-20261202-the-photos', class: ThePhotos },
+  { name: 'migration-20261203-the-designs', class: TheDesigns },
 ];

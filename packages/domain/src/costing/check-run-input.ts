@@ -37,6 +37,9 @@ function checkBreaks(breaks: readonly Break[]): void {
 function checkMaterials(input: RunInput): void {
   const { leather, supplies = [], options = [] } = input;
   checkMoney(leather.pricePerFt2, 'leather.pricePerFt2', 4);
+  if (leather.extraPercent !== undefined) {
+    readDecimal(leather.extraPercent, 'leather.extraPercent', { min: 0, max: 200 });
+  }
   if (leather.whole) {
     readDecimal(leather.whole.areaMm2, 'leather.whole.areaMm2', { min: 1 });
     readDecimal(leather.whole.usablePercent, 'leather.whole.usablePercent', { min: 1, max: 100 });

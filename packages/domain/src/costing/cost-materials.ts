@@ -63,12 +63,13 @@ function addLeather(lines: CostLines, input: RunInput, { containers, area }: Tak
   const { leather, layout } = input;
   const footage = mm2ToFootage(area);
   const one = toAtMost(mm2ToFootage(layout.containerAreaMm2), 3);
+  const more = Number(leather.extraPercent ?? '0') > 0 ? ` and ${leather.extraPercent} % more` : '';
   const noun = `${layout.form}${containers === 1 ? '' : 's'}`;
   lines.add(
     'leather',
     leather.name,
     footage.times(leather.pricePerFt2),
-    `${containers} ${noun} × ${one} ft² at ${leather.pricePerFt2} per ft²`,
+    `${containers} ${noun} × ${one} ft²${more} at ${leather.pricePerFt2} per ft²`,
   );
 }
 

@@ -1,3 +1,4 @@
+import type { Decimal } from 'decimal.js';
 import { NotWorkable } from '../errors/domain-error.ts';
 import { type DecimalText, Exact, toAtMost } from '../numbers/decimal-text.ts';
 import { type CutPlan, planCut } from '../rejects/plan-cut.ts';
@@ -25,7 +26,7 @@ export interface RunCost extends CutPlan {
 }
 
 /**
- * Leather is costed by whole containers, hardware by the pieces that need it, wages by the pieces
+ * Leather is costed by whole containers and what runs take on top, hardware by the pieces that need it, wages by the pieces
  * cut; desk time at the same wage; packing, carriage and tooling once. Each line is rounded once and
  * they add up. What a card costs depends on the price and is added there. The input has been checked.
  */
@@ -34,7 +35,7 @@ export function costRun(
   quantity: number,
   cut: CutPlan = cutOf(input, quantity),
 ): RunCost {
-  const area = new Exact(input.layout.containerAreaMm2).times(cut.containers);
+  const area = leatherArea(input, cut.containers);
   const bench = benchMinutes(input.work, {
     pieces: cut.cutCount,
     containers: cut.containers,
@@ -67,6 +68,12 @@ export function costRun(
     minutesByStep: bench.bySteps,
     allMinutes: toAtMost(new Exact(bench.total).plus(input.deskMinutesPerOrder), 4),
   };
+}
+
+/** Whole panels or strips, and what runs take on top of them. */
+function leatherArea({ layout, leather }: RunInput, containers: number): Decimal {
+  const factor = new Exact(leather.extraPercent ?? '0').plus(100).div(100);
+  return new Exact(layout.containerAreaMm2).times(containers).times(factor);
 }
 
 /** How many to cut for so many good ones. It is the same for every option of a run. */

@@ -32,6 +32,8 @@ export interface RunLayout {
 export interface RunLeather {
   name: string;
   pricePerFt2: DecimalText;
+  /** what runs take on top of the layout, for flaws and what is cut away around them, per cent */
+  extraPercent?: DecimalText | undefined;
   /** what it is bought as, whole: a side of so much, of which so much can be used */
   whole?: { form: string; areaMm2: DecimalText; usablePercent: DecimalText } | null | undefined;
 }

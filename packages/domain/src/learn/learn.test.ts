@@ -1,6 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { matchSteps } from './match-steps.ts';
+import { poolLeather } from './pool-leather.ts';
+import { poolLosses } from './pool-losses.ts';
 import { minutesPer100, poolMinutes } from './pool-minutes.ts';
 import { poolRejects } from './pool-shares.ts';
 import { poolStepTime } from './pool-step-time.ts';
@@ -137,6 +139,50 @@ describe('poolStepTime', () => {
           expect(Math.abs(again - was)).toBeLessThanOrEqual(rounding);
         },
       ),
+    );
+  });
+});
+
+describe('poolLeather', () => {
+  it('weighs runs by what their layouts say', () => {
+    const runs = [
+      { layoutAreaMm2: '100000', usedAreaMm2: '120000' },
+      { layoutAreaMm2: '300000', usedAreaMm2: '300000' },
+    ];
+    expect(poolLeather(runs)).toEqual({
+      ...{ extraPercent: '5', leastPercent: '0', mostPercent: '20', runs: 2 },
+    });
+  });
+
+  it('asks for no less than the layout, and says nothing of no run', () => {
+    const thrifty = poolLeather([{ layoutAreaMm2: '1000', usedAreaMm2: '900' }]);
+    expect(thrifty).toMatchObject({ extraPercent: '0', leastPercent: '-10' });
+    expect(poolLeather([])).toBeNull();
+    expect(() => poolLeather([{ layoutAreaMm2: '0', usedAreaMm2: '1' }])).toThrow('layoutAreaMm2');
+  });
+});
+
+describe('poolLosses', () => {
+  it('is the share of what was taken that no piece needed', () => {
+    const runs = [
+      { needed: 100, taken: 110 },
+      { needed: 200, taken: 205 },
+    ];
+    expect(poolLosses(runs)).toEqual({ percent: '4.76', needed: 300, taken: 315, runs: 2 });
+    expect(poolLosses([{ needed: 4, taken: 2 }])?.percent).toBe('0');
+    expect(poolLosses([])).toBeNull();
+  });
+
+  it('is reckoned so that the pattern asks again for what was taken', () => {
+    const counts = fc.tuple(fc.integer({ min: 1, max: 3000 }), fc.nat(900));
+    fc.assert(
+      fc.property(counts, ([needed, lost]) => {
+        const found = poolLosses([{ needed, taken: needed + lost }]);
+        const again = needed / (1 - Number(found?.percent) / 100);
+        expect(Math.abs(again - needed - lost)).toBeLessThanOrEqual(
+          (0.0001 * (needed + lost) ** 2) / needed,
+        );
+      }),
     );
   });
 });

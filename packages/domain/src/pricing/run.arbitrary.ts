@@ -33,6 +33,7 @@ export const aFullRun: fc.Arbitrary<RunInput> = fc.record({
   leather: fc.record({
     name: fc.constant('Side'),
     pricePerFt2: money(1, 40),
+    extraPercent: fc.constantFrom('0', '4', '12.5'),
     whole: fc.constant({ form: 'side', areaMm2: '2043866.88', usablePercent: '85' }),
   }),
   hardware: fc.array(

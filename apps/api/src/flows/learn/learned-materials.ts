@@ -1,11 +1,13 @@
 import type { Learned, PatternDefinition } from '@hidewright/contract';
-import { goodShare, toAtMost, type Layout } from '@hidewright/domain';
+import { goodShare, poolLeather, poolLosses, toAtMost, type Layout } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { StoredLayout } from '../../modules/layouts/layout.entity.ts';
 import { layoutHash } from '../../modules/layouts/stored-layouts.ts';
 import { StockMovement } from '../../modules/stock/stock-movement.entity.ts';
+import { handledIn } from '../../modules/jobs/step-limits.ts';
+import { estimateOf } from '../job-estimate.ts';
 import type { PastRun } from './past-runs.ts';
 
 /** Leather and hardware for each good piece: as the pattern has it, and as the runs took it from stock. */
@@ -18,6 +20,8 @@ export async function learnMaterials(
     leather: {
       saidMm2: await saidLeather(em, definition),
       foundMm2: perGood(runs, ({ used }) => used.leatherAreaMm2, 3),
+      saidExtraPercent: definition.leatherExtraPercent ?? '0',
+      extra: poolLeather(runs.flatMap(leatherOf)),
     },
     hardware: await hardwareOf(em, definition, runs),
     money: {
@@ -51,7 +55,8 @@ async function saidLeather(
   if (stored === null || stored.pieces === 0) return null;
   const { containerAreaMm2, pieces } = stored.result as Layout;
   const each = new Decimal(containerAreaMm2).div(pieces);
-  return toAtMost(each.div(goodShare(definition.work)), 3);
+  const extra = new Decimal(definition.leatherExtraPercent ?? '0').div(100).plus(1);
+  return toAtMost(each.times(extra).div(goodShare(definition.work)), 3);
 }
 
 async function hardwareOf(
@@ -66,11 +71,38 @@ async function hardwareOf(
     jobId: { $in: jobs },
     hardwareId: { $in: ids },
   });
-  return definition.hardware.map(({ hardwareId, perPiece }) => ({
-    name: kinds.find(({ id }) => id === hardwareId)?.name ?? '',
-    said: perPiece,
-    found: perGood(runs, ({ job }) => takenFor(moved, job.id, hardwareId), 3),
-  }));
+  return definition.hardware.map((line) => {
+    const { hardwareId, perPiece } = line;
+    return {
+      hardwareId,
+      name: kinds.find(({ id }) => id === hardwareId)?.name ?? '',
+      said: perPiece,
+      found: perGood(runs, ({ job }) => takenFor(moved, job.id, hardwareId), 3),
+      saidLossPercent: line.lossPercent ?? '0',
+      losses: poolLosses(runs.flatMap((run) => fitted(run, line, moved))),
+    };
+  });
+}
+
+/** What the run's layout says of the panels that it planned, and what was taken for it. */
+function leatherOf({ job, used }: PastRun): { layoutAreaMm2: string; usedAreaMm2: string }[] {
+  if (used.leatherAreaMm2 === null) return [];
+  const { containerAreaMm2 } = estimateOf(job).input.layout;
+  const layoutAreaMm2 = new Decimal(containerAreaMm2).times(job.containers).toString();
+  return [{ layoutAreaMm2, usedAreaMm2: used.leatherAreaMm2 }];
+}
+
+/** What the pieces needed that came as far as this hardware, and what was taken for them. */
+function fitted(
+  { job, steps }: PastRun,
+  { hardwareId, perPiece, fromStep }: PatternDefinition['hardware'][number],
+  moved: readonly StockMovement[],
+): { needed: number; taken: number }[] {
+  const taken = takenFor(moved, job.id, hardwareId);
+  if (taken === null || taken <= 0) return [];
+  const step = steps[fromStep ?? -1];
+  const pieces = Math.max(job.good + job.seconds, step === undefined ? 0 : handledIn(step));
+  return [{ needed: pieces * perPiece, taken }];
 }
 
 function takenFor(moved: readonly StockMovement[], job: number, hardwareId: number): number | null {

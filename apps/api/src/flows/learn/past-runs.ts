@@ -1,6 +1,7 @@
 import type { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { minutesPer100, unusualRuns, type Unusual } from '@hidewright/domain';
+import { Customer } from '../../modules/customers/customer.entity.ts';
 import { Job } from '../../modules/jobs/job.entity.ts';
 import { JobStep } from '../../modules/jobs/job-step.entity.ts';
 import {
@@ -9,6 +10,7 @@ import {
   piecesRun,
   piecesSpoiled,
 } from '../../modules/jobs/step-limits.ts';
+import { Order } from '../../modules/orders/order.entity.ts';
 import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts';
 import { usedBy, type Used } from '../used-by-job.ts';
 
@@ -17,6 +19,7 @@ const mostRuns = 8;
 /** A finished job as the next estimate of its pattern looks at it. */
 export interface PastRun {
   job: Job;
+  customer: Customer;
   patternVersion: number;
   steps: JobStep[];
   used: Used;
@@ -28,13 +31,24 @@ export interface PastRun {
   unusual: Unusual | null;
 }
 
-/** The last finished jobs of a pattern, newest first, whichever version they were made by. */
-export async function pastRuns(em: EntityManager, patternId: number): Promise<PastRun[]> {
+/**
+ * The last finished jobs of a pattern, newest first, whichever version they were made by: of one customer, or, where
+ * it is null, of all.
+ */
+export async function pastRuns(
+  em: EntityManager,
+  patternId: number,
+  customerId: number | null,
+): Promise<PastRun[]> {
   const versions = await em.find(PatternVersion, { patternId }, { fields: ['id', 'number'] });
   const numbers = new Map(versions.map(({ id, number }) => [id, number]));
   const jobs = await em.find(
     Job,
-    { patternVersionId: { $in: [...numbers.keys()] }, state: 'finished' },
+    {
+      patternVersionId: { $in: [...numbers.keys()] },
+      state: 'finished',
+      ...(customerId !== null && { orderId: { $in: await ordersOf(em, customerId) } }),
+    },
     { orderBy: { finishedAt: 'desc', id: 'desc' }, limit: mostRuns },
   );
   const steps = await em.find(
@@ -46,9 +60,32 @@ export async function pastRuns(em: EntityManager, patternId: number): Promise<Pa
   for (const job of jobs) {
     const own = steps.filter(({ jobId }) => jobId === job.id);
     const patternVersion = numbers.get(job.patternVersionId) ?? 0;
-    runs.push({ ...runOf(job, own, await usedBy(em, job, own)), patternVersion });
+    const { customerId: whose } = await em.findOneOrFail(Order, job.orderId);
+    const customer = await em.findOneOrFail(Customer, whose);
+    runs.push({ ...runOf(job, own, await usedBy(em, job, own)), customer, patternVersion });
   }
   return withUnusual(runs);
+}
+
+async function ordersOf(em: EntityManager, customerId: number): Promise<number[]> {
+  const orders = await em.find(Order, { customerId }, { fields: ['id'] });
+  return orders.map(({ id }) => id);
+}
+
+/** Who has had finished runs of a pattern, and how many, the most first. */
+export async function customersOf(
+  em: EntityManager,
+  patternId: number,
+): Promise<{ id: number; name: string; runs: number }[]> {
+  return em.execute(
+    `SELECT customer.id, customer.name, COUNT(*) AS runs FROM job
+      JOIN pattern_version ON pattern_version.id = job.pattern_version_id
+      JOIN customer_order ON customer_order.id = job.order_id
+      JOIN customer ON customer.id = customer_order.customer_id
+      WHERE pattern_version.pattern_id = ? AND job.state = 'finished'
+      GROUP BY customer.id ORDER BY runs DESC, customer.name`,
+    [patternId],
+  );
 }
 
 /** Where a step was not counted to its end, what came out and what was spoiled is what was cut. */

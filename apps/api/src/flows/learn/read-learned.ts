@@ -2,6 +2,7 @@ import type { Learned, PastRun as PastRunReply, PatternDefinition } from '@hidew
 import { goodShare, poolMinutes, poolRejects, toAtMost } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { dayIn } from '../../day-in.ts';
+import { definitionFor, describeDesign } from '../../modules/designs/read-designs.ts';
 import { countsPieces } from '../../modules/jobs/step-limits.ts';
 import {
   definitionOf,
@@ -12,22 +13,32 @@ import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { Work } from '../../work.ts';
 import { learnMaterials } from './learned-materials.ts';
 import { learnSteps } from './learned-steps.ts';
-import { pastRuns, type PastRun } from './past-runs.ts';
+import { customersOf, pastRuns, type PastRun } from './past-runs.ts';
+
+interface Asked {
+  /** The jobs to leave out, by id. */
+  without?: readonly number[] | undefined;
+  /** Only this customer's runs, against what their quotes go by. */
+  customerId?: number | null | undefined;
+}
 
 /**
  * What the last finished runs of a pattern say its next estimate should be.
- * @param without the jobs to leave out, by id
  * @throws {Problem} 404
  */
 export async function readLearned(
   { em }: Pick<Work, 'em'>,
   patternId: number,
-  without: readonly number[],
+  { without = [], customerId = null }: Asked,
 ): Promise<Learned> {
   const pattern = await findPattern({ em }, patternId);
-  const definition = definitionOf(await latestVersion({ em }, pattern));
+  const { definition, design } = await definitionFor(
+    em,
+    definitionOf(await latestVersion({ em }, pattern)),
+    { patternId, customerId },
+  );
   const { timeZone } = await em.findOneOrFail(Workshop, 1);
-  const runs = await pastRuns(em, patternId);
+  const runs = await pastRuns(em, patternId, customerId);
   const mixed = runs.filter(({ job }) => !without.includes(job.id));
   const { work } = definition;
   const steps = work.kind === 'steps' ? learnSteps(work.steps, mixed) : [];
@@ -39,6 +50,9 @@ export async function readLearned(
     patternId,
     patternName: pattern.name,
     versionNumber: pattern.latestVersion,
+    customerId,
+    customers: await customersOf(em, patternId),
+    design: design === null ? null : await describeDesign(em, design),
     by: work.kind,
     runs: runs.map((run) => toReply(run, timeZone, !without.includes(run.job.id))),
     minutes: {
@@ -86,6 +100,7 @@ function toReply(run: PastRun, timeZone: string, mixedIn: boolean): PastRunReply
   return {
     jobId: job.id,
     number: job.number,
+    customerName: run.customer.name,
     finishedOn: dayIn(timeZone, new Date(job.finishedAt ?? 0)),
     patternVersion: run.patternVersion,
     quantity: job.quantity,

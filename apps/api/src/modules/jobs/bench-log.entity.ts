@@ -1,11 +1,11 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 import type { Decimal } from 'decimal.js';
-import { TimeType } from '../../db/columns/columns.ts';
+import { MoneyType, TimeType } from '../../db/columns/columns.ts';
 
 /** What a maker logged on a step; never changed, a slip is put right by a further row. */
 @Entity({ tableName: 'bench_log' })
 export class BenchLog {
-  [OptionalProps]?: 'note';
+  [OptionalProps]?: 'note' | 'wagePerHour';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -24,6 +24,10 @@ export class BenchLog {
 
   @Property({ type: TimeType, columnType: 'integer' })
   minutes!: Decimal;
+
+  /** What an hour of whoever logged it was paid then; null where it was the wage of the estimate. */
+  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  wagePerHour: Decimal | null = null;
 
   @Property({ type: 'text', columnType: 'text' })
   note = '';

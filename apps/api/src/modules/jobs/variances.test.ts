@@ -1,6 +1,6 @@
 import { Decimal } from 'decimal.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { Job, JobComparison, JobVariances } from '@hidewright/contract';
+import type { Job, JobComparison, JobVariances, Person } from '@hidewright/contract';
 import { readyForTheBench, takenOn, ticketOf, type BenchShop } from '../../testing/bench-shop.ts';
 import { finishedRun } from '../../testing/finished-run.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
@@ -25,17 +25,11 @@ const logs = {
   'Fold and rivet': { good: 50, minutes: '50' },
 };
 
-async function takenRun(): Promise<Job> {
-  const ticket = await ticketOf(ready, await takenOn(ready));
-  const post = (what: string, body: object) =>
-    ready.shop.as('maker').post(`/api/jobs/${ticket.id}/${what}`).send(body).expect(201);
-  await post('takings', { lotId: ready.lotId, areaMm2: ticket.neededAreaMm2 });
-  await post('takings', { hardwareId: ready.hardwareId, quantity: 120 });
-  for (const { id, name } of ticket.steps) {
-    await post('logs', { stepId: id, ...logs[name as keyof typeof logs] });
-  }
-  return (await post('finish', { good: 50 })).body as Job;
-}
+const takenRun = (): Promise<Job> =>
+  finishedRun(ready, logs, { good: 50 }, ({ neededAreaMm2 }) => [
+    { lotId: ready.lotId, areaMm2: neededAreaMm2 },
+    { hardwareId: ready.hardwareId, quantity: 120 },
+  ]);
 
 describe('why a run cost other than was said', () => {
   let job: Job;
@@ -102,5 +96,31 @@ describe('a run of which little was logged', () => {
   it('waits until it is finished', async () => {
     const { id } = await ticketOf(ready, await takenOn(ready, 50, { evenIfShort: true }));
     await ready.shop.as('owner').get(`/api/jobs/${id}/variances`).expect(409);
+  });
+});
+
+describe('an hour that was paid otherwise than the shop’s wage', () => {
+  it('is told apart from slow work, and adds up', async () => {
+    const paid = await readyForTheBench(await startTestShop());
+    const owner = paid.shop.as('owner');
+    const { items } = (await owner.get('/api/people').expect(200)).body as { items: Person[] };
+    const maker = items.find(({ role }) => role === 'maker') as Person;
+    await owner
+      .patch(`/api/people/${maker.id}`)
+      .set('If-Match', `"${maker.version}"`)
+      .send({ wagePerHour: '30' })
+      .expect(200);
+    const job = await finishedRun(paid, logs);
+    const reply = await owner.get(`/api/jobs/${job.id}/variances`).expect(200);
+    const { steps, wages } = reply.body as JobVariances;
+    // 19 minutes of stamping at 30 in place of 22 an hour.
+    expect(steps[1]?.money?.wage).toBe('2.53');
+    const { money } = (await owner.get(`/api/jobs/${job.id}/comparison`).expect(200))
+      .body as JobComparison;
+    const row = money?.find(({ what }) => what === 'Bench wages');
+    // 94 minutes at 30 an hour.
+    expect(row?.fact).toBe('47.00');
+    expect(new Decimal(row?.fact ?? 0).minus(row?.estimate ?? 0).toFixed(2)).toBe(wages?.sum);
+    await paid.shop.close();
   });
 });

@@ -15,7 +15,7 @@ export function learnedRoutes(context: Context): Router {
   const router = Router();
 
   serve(router, context, readLearnedEndpoint, (work, { params, query }) =>
-    readLearned(work, params.id, query.without ?? []),
+    readLearned(work, params.id, query),
   );
 
   serve(

@@ -69,7 +69,10 @@ describe('what the last runs of a pattern say', () => {
     ]);
     expect(found.steps.map(({ rejects }) => rejects?.rejected ?? null)).toEqual([null, 6, 2, 3]);
     expect(found.history).toEqual({ good: 101, of: 112, uncounted: [] });
-    expect(found.hardware).toEqual([{ name: 'Rivet 9 mm', said: 2, found: null }]);
+    expect(found.hardware).toMatchObject([
+      { name: 'Rivet 9 mm', said: 2, found: null, saidLossPercent: '0', losses: null },
+    ]);
+    expect(found.leather.extra).toBeNull();
   });
 
   it('can be read without a run', async () => {

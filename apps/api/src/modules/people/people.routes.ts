@@ -7,7 +7,9 @@ import {
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { assignDefined } from '../../db/assign-defined.ts';
+import { decimals } from '../../db/decimals.ts';
 import { requireVersion } from '../../http/conditions.ts';
+import { moneyText } from '../../http/decimal-text.ts';
 import { invalid, notFound } from '../../http/problem.ts';
 import { serve } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
@@ -64,8 +66,12 @@ export function peopleRoutes(context: Context): Router {
       );
       if (body.email !== undefined && body.email.toLowerCase() !== person.email)
         await requireFreeEmail(work, body.email);
-      const { name, role, active } = body;
-      assignDefined(person, { name, role, active, passwordHash, email: body.email?.toLowerCase() });
+      const { name, role, active, wagePerHour } = body;
+      assignDefined(person, {
+        ...{ name, role, active, passwordHash },
+        email: body.email?.toLowerCase(),
+        ...decimals({ wagePerHour }),
+      });
       await work.em.flush();
       await requireAnOwner(work);
       if (passwordHash !== undefined || active === false)
@@ -103,6 +109,9 @@ async function requireAnOwner(work: Work): Promise<void> {
 }
 
 function toReply(person: Person): PersonReply {
-  const { id, name, email, role, active, version } = person;
-  return { id, name, email, role, active, version };
+  const { id, name, email, role, active, wagePerHour, version } = person;
+  return {
+    ...{ id, name, email, role, active, version },
+    wagePerHour: wagePerHour === null ? null : moneyText(wagePerHour),
+  };
 }

@@ -1,9 +1,11 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { MoneyType } from '../../db/columns/columns.ts';
 
 /** Somebody who signs in. */
 @Entity({ tableName: 'person' })
 export class Person {
-  [OptionalProps]?: 'active' | 'version';
+  [OptionalProps]?: 'active' | 'wagePerHour' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -23,6 +25,10 @@ export class Person {
 
   @Property({ type: 'boolean', columnType: 'integer' })
   active = true;
+
+  /** What an hour of theirs is paid; null where it is the shop's wage. */
+  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  wagePerHour: Decimal | null = null;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;

@@ -3,8 +3,9 @@ import { countText, minutesText, numberText, percentText } from '../../lib/forma
 
 /** A figure that can be taken into the pattern. */
 export interface Offered {
-  what: 'minutes' | 'rejects';
+  what: 'minutes' | 'rejects' | 'leather' | 'hardware';
   step: number | null;
+  hardwareId: number | null;
   /** "Stamp, time" */
   name: string;
   now: string;
@@ -16,8 +17,52 @@ export interface Offered {
 
 /** What the runs offer to the pattern, in the order of its work; what no run logged is not among it. */
 export function offeredBy(learned: Learned): Offered[] {
-  if (learned.by === 'steps') return learned.steps.flatMap(offeredByStep);
-  const { minutes, rejects } = learned;
+  const work = learned.by === 'steps' ? learned.steps.flatMap(offeredByStep) : oneFigure(learned);
+  return [
+    ...work.map((each) => ({ ...each, hardwareId: null })),
+    ...leatherOffered(learned.leather),
+    ...learned.hardware.flatMap(hardwareOffered),
+  ];
+}
+
+function leatherOffered({ saidExtraPercent, extra }: Learned['leather']): Offered[] {
+  if (extra === null) return [];
+  const { extraPercent, leastPercent, mostPercent, runs } = extra;
+  const words = (percent: string) =>
+    Number(percent) === 0 ? 'as the layout' : `layout and ${percentText(percent, 2)}`;
+  return [
+    {
+      ...{ what: 'leather' as const, step: null, hardwareId: null, name: 'Leather' },
+      now: words(saidExtraPercent),
+      found: words(extraPercent),
+      behind:
+        runs === 1
+          ? '1 run'
+          : `${runsWord(runs)}, ${percentText(leastPercent)} to ${percentText(mostPercent)} beside the layout`,
+      changes: Number(extraPercent) !== Number(saidExtraPercent),
+    },
+  ];
+}
+
+function hardwareOffered({
+  hardwareId,
+  name,
+  saidLossPercent,
+  losses,
+}: Learned['hardware'][number]): Offered[] {
+  if (losses === null) return [];
+  return [
+    {
+      ...{ what: 'hardware' as const, step: null, hardwareId, name: `${name}: lost` },
+      now: percentText(saidLossPercent, 2),
+      found: percentText(losses.percent, 2),
+      behind: `${countText(losses.taken)} taken for ${countText(losses.needed)} in ${runsWord(losses.runs)}`,
+      changes: Number(losses.percent) !== Number(saidLossPercent),
+    },
+  ];
+}
+
+function oneFigure({ minutes, rejects }: Learned): Omit<Offered, 'hardwareId'>[] {
   return [
     ...(minutes.found === null
       ? []
@@ -36,7 +81,14 @@ export function offeredBy(learned: Learned): Offered[] {
   ];
 }
 
-function offeredByStep({ position: step, name, per, said, time, rejects }: LearnedStep): Offered[] {
+function offeredByStep({
+  position: step,
+  name,
+  per,
+  said,
+  time,
+  rejects,
+}: LearnedStep): Omit<Offered, 'hardwareId'>[] {
   return [
     ...(time === null ? [] : [{ ...timeOffered(said, time, per), step, name: `${name}: time` }]),
     ...(rejects === null

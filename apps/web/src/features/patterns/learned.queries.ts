@@ -2,12 +2,13 @@ import { listTimeReadings, readLearned } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
-/** What the last runs of a pattern say, some of them left out. */
-export function learnedQuery(id: number, left: readonly number[] = []) {
+/** What the last runs of a pattern say, of one customer or of all, some of them left out. */
+export function learnedQuery(id: number, left: readonly number[] = [], customerId?: number) {
   const without = left.length === 0 ? undefined : left.join(',');
   return queryOptions({
-    queryKey: ['patterns', id, 'learned', without],
-    queryFn: ({ signal }) => call(readLearned, { params: { id }, query: { without }, signal }),
+    queryKey: ['patterns', id, 'learned', without, customerId],
+    queryFn: ({ signal }) =>
+      call(readLearned, { params: { id }, query: { without, customerId }, signal }),
   });
 }
 

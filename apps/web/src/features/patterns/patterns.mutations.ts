@@ -5,6 +5,7 @@ import {
   addTimeReadings,
   adviseCut,
   changePattern,
+  dropDesign,
   takeLearned,
 } from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
@@ -14,6 +15,8 @@ export const useAddPattern = () => useSend(addPattern);
 export const useChangePattern = () => useSend(changePattern);
 
 export const useTakeLearned = () => useSend(takeLearned);
+
+export const useDropDesign = () => useSend(dropDesign);
 
 export const useAddTimeReadings = () => useSend(addTimeReadings);
 

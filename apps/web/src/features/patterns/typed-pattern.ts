@@ -5,6 +5,7 @@ import {
   type Workshop,
 } from '@hidewright/contract';
 import { z } from 'zod';
+import { filled, pick } from './filled.ts';
 import { hardwareBody, partsBody } from './typed-parts.ts';
 import { blankWork, stepCount, typedWork, workBody } from './typed-work.ts';
 
@@ -45,6 +46,7 @@ const blankDefinition = {
   spacingMm: '',
   trimMm: '',
   leatherId: '',
+  leatherExtraPercent: '',
   hardware: [],
   supplies: [],
   options: [],
@@ -67,6 +69,7 @@ export function typedPattern({ name, definition }: Pick<Pattern, 'name' | 'defin
     name,
     definition: {
       ...definition,
+      leatherExtraPercent: definition.leatherExtraPercent ?? '',
       alsoDrawn: definition.layoutBy === 'hand count' && definition.outline !== null,
       outline: { ...blank.outline, ...definition.outline },
       handCount: { ...blank.handCount, ...definition.handCount },
@@ -105,6 +108,7 @@ function definitionBody(definition: Typed): Typed {
   return {
     ...layoutBody(definition),
     leatherId: definition['leatherId'],
+    ...filled(pick(definition, ['leatherExtraPercent'])),
     hardware: hardware.map((line) => hardwareBody(line, stepCount(work))),
     ...partsBody(definition),
     work: workBody(work),

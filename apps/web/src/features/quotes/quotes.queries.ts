@@ -43,10 +43,11 @@ function refreshAfter(quote: Quote | undefined): number | false {
 }
 
 /** What a run of a pattern is priced from, so that the page can price it as it is typed. */
-export function runBasisQuery(patternId: number) {
+export function runBasisQuery(patternId: number, customerId?: number) {
   return queryOptions({
-    queryKey: ['patterns', patternId, 'run-basis'],
-    queryFn: ({ signal }) => call(readRunBasis, { params: { id: patternId }, signal }),
+    queryKey: ['patterns', patternId, 'run-basis', customerId],
+    queryFn: ({ signal }) =>
+      call(readRunBasis, { params: { id: patternId }, query: { customerId }, signal }),
     staleTime: 30_000,
   });
 }

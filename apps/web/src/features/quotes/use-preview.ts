@@ -12,10 +12,19 @@ export interface PreviewSoFar {
 
 /** The numbers of the form as it stands, once a pattern is chosen. */
 export function usePreview(): PreviewSoFar {
-  const typed = useDeferredValue(useWatch() as TypedSoFar & { patternId?: unknown });
+  const typed = useDeferredValue(
+    useWatch() as TypedSoFar & {
+      patternId?: unknown;
+      customerId?: unknown;
+    },
+  );
   const patternId = Number(typed.patternId);
   const chosen = Number.isInteger(patternId) && patternId > 0;
-  const { data: basis, error } = useQuery({ ...runBasisQuery(patternId), enabled: chosen });
+  const customerId = Number(typed.customerId) || undefined;
+  const { data: basis, error } = useQuery({
+    ...runBasisQuery(patternId, customerId),
+    enabled: chosen,
+  });
   const preview = useMemo(() => {
     if (error) return { why: error.message };
     return basis && previewOf(basis, typed);

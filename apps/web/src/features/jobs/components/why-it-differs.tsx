@@ -34,8 +34,8 @@ function Differences({ found }: { found: JobVariances }) {
             ))}
           </ul>
           <p className="mt-2 text-sm text-ink-soft">
-            Every hour is reckoned at the wage of the quote; leather and hardware that nobody took
-            from stock are left out.
+            An hour counts at the wage of whoever logged it, where the Office knows it, else at the
+            wage of the quote; leather and hardware that nobody took from stock are left out.
           </p>
         </div>
       )}

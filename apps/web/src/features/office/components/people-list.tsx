@@ -4,12 +4,20 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { say } from '../../../components/toast.ts';
 import { ApiProblem } from '../../../lib/api-problem.ts';
+import { Wage } from './person-wage.tsx';
 import { useChangePerson } from '../office.mutations.ts';
 
 const columns: readonly Column<Person>[] = [
   { id: 'name', header: 'Name', value: (person) => person.name, onPhone: 'title' },
   { id: 'email', header: 'E-mail address', value: (person) => person.email },
   { id: 'role', header: 'Role', value: (person) => person.role },
+  {
+    id: 'wage',
+    header: 'Paid an hour',
+    value: (person) => person.wagePerHour,
+    cell: (person) => <Wage person={person} />,
+    align: 'right',
+  },
   {
     id: 'active',
     header: 'Access',

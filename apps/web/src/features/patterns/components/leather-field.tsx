@@ -3,6 +3,8 @@ import { Plus } from 'lucide-react';
 import { useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
+import { DecimalField } from '../../../components/decimal-field.tsx';
+import { More } from '../../../components/more.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { unitPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -42,6 +44,15 @@ export function LeatherField() {
       <Button tone="quiet" className="mt-1 -ml-3" onClick={() => setAdding(true)}>
         <Plus size={18} aria-hidden="true" /> Another leather
       </Button>
+      <More word="More leather than the layout" names={['definition.leatherExtraPercent']}>
+        <DecimalField
+          name="definition.leatherExtraPercent"
+          label="On top of the layout"
+          unit="%"
+          optional
+          help="For flaws and what is cut away around them; runs that are finished say how much it was."
+        />
+      </More>
       <AddLeatherDialog open={adding} onOpenChange={setAdding} onAdded={({ id }) => choose(id)} />
     </div>
   );

@@ -50,6 +50,7 @@ function columnsFor(
         <span className="block text-left">
           <TextLink to={`/bench/jobs/${run.jobId}`}>{run.number}</TextLink>
           {`, ${dayText(run.finishedOn, today)}`}
+          <span className="block text-sm text-ink-soft">{run.customerName}</span>
           {run.unusual && (
             <span className="block text-sm font-semibold text-brass">
               {unusualWords[run.unusual]}

@@ -14,7 +14,7 @@ interface TakeLearnedProps {
   without: readonly number[];
 }
 
-const keyOf = ({ what, step }: Offered) => `${what} ${step ?? ''}`;
+const keyOf = ({ what, step, hardwareId }: Offered) => `${what} ${step ?? ''} ${hardwareId ?? ''}`;
 
 /** The figures that can go into the pattern: all of them, or one by one. */
 export function TakeLearned({ learned, without }: TakeLearnedProps) {
@@ -24,17 +24,22 @@ export function TakeLearned({ learned, without }: TakeLearnedProps) {
   const offered = offeredBy(learned);
   const taken = offered.filter((each) => !left.includes(keyOf(each)));
   const news = offered.some(({ changes }) => changes);
+  const whose = learned.customers.find(({ id }) => id === learned.customerId)?.name;
 
   async function use() {
     setProblem(undefined);
-    const take = taken.map(({ what, step }) => ({ what, step }));
+    const take = taken.map(({ what, step, hardwareId }) => ({ what, step, hardwareId }));
     try {
       const { patternName, versionNumber } = await send.mutateAsync({
         params: { id: learned.patternId },
-        body: { without: [...without], take },
+        body: { without: [...without], customerId: learned.customerId, take },
         ifMatch: learned.version,
       });
-      say(`${patternName} goes by its last runs as version ${versionNumber}.`);
+      say(
+        whose === undefined
+          ? `${patternName} goes by its last runs as version ${versionNumber}.`
+          : `Quotes for ${whose} go by their own runs from now on.`,
+      );
     } catch (error) {
       setProblem(error instanceof ApiProblem ? error.detail : 'This could not be sent. Try again.');
     }
@@ -43,7 +48,14 @@ export function TakeLearned({ learned, without }: TakeLearnedProps) {
   const set = (each: Offered, on: boolean) =>
     setLeft(on ? left.filter((key) => key !== keyOf(each)) : [...left, keyOf(each)]);
   return (
-    <Card title="Use these" subtitle="A new version of the pattern; quotes keep theirs.">
+    <Card
+      title="Use these"
+      subtitle={
+        whose === undefined
+          ? 'A new version of the pattern; quotes keep theirs.'
+          : `For the next quotes of ${whose} alone; what is not ticked stays as the pattern has it.`
+      }
+    >
       {problem && (
         <Notice tone="danger" live className="mb-3">
           {problem}
@@ -66,7 +78,9 @@ export function TakeLearned({ learned, without }: TakeLearnedProps) {
       <Notes learned={learned} />
       {offered.length > 0 && !news && (
         <Notice tone="ok" className="mt-3">
-          {`Version ${learned.versionNumber} says the same already.`}
+          {whose === undefined
+            ? `Version ${learned.versionNumber} says the same already.`
+            : `Quotes for ${whose} say the same already.`}
         </Notice>
       )}
       {offered.length > 0 && (

@@ -22,6 +22,11 @@ export function WhatItTakes({ pattern }: { pattern: Pattern }) {
     <div className="space-y-5">
       <dl className="grid grid-cols-[auto_1fr] gap-x-6 gap-y-2">
         <Line word="leather">{pattern.leatherName}</Line>
+        {Number(definition.leatherExtraPercent ?? '0') > 0 && (
+          <Line word="on top of the layout">
+            {percentText(definition.leatherExtraPercent ?? '0')}
+          </Line>
+        )}
         <List
           word="hardware"
           lines={definition.hardware.map((line) => hardwareWords(line, known, work))}

@@ -3,6 +3,7 @@ import { goodShare } from '@hidewright/domain';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { More } from '../../../components/more.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { percentText, unitPriceText } from '../../../lib/formatting.ts';
 
 /** Values that are worked out or looked up, and can be set by hand for this quote alone. */
@@ -11,6 +12,7 @@ export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
   const { leather } = basis.input;
   return (
     <More word="Set by hand, for this quote alone" names={['overrides']}>
+      {basis.design && <OwnRuns design={basis.design} />}
       <MoneyField
         name="overrides.leatherPricePerFt2"
         label="Leather price"
@@ -26,6 +28,19 @@ export function OverrideFields({ basis }: { basis: RunBasis | undefined }) {
         help={`The pattern says ${percentText(rejectsOf(basis))}${basis.input.history ? ', and its own runs are counted with' : ''}.`}
       />
     </More>
+  );
+}
+
+/** That this customer's numbers are not quite the pattern's. */
+function OwnRuns({ design }: { design: NonNullable<RunBasis['design']> }) {
+  const { customerId, customerName, patternId } = design;
+  return (
+    <p className="text-ink-soft">
+      {`Minutes and rejects go by ${customerName}’s own runs. `}
+      <TextLink to={`/pattern-room/patterns/${patternId}/learned?customer=${customerId}`}>
+        See them
+      </TextLink>
+    </p>
   );
 }
 
