@@ -154,6 +154,7 @@ export const lie = {
   shiftMm: mm.nullable(),
   rows: z.int().nullable(),
   piecesPerRow: z.int().nullable(),
+  rowPieces: z.array(z.int()).nullable().default(null),
   turned: z.enum(['none', 'every other row', 'every other piece']),
   containerAreaMm2: z.string(),
   pieceAreaMm2: z.string().nullable(),

@@ -93,14 +93,22 @@ function valuesOf(workshop: Workshop) {
   };
 }
 
-function layoutOf({ container, pieces, containerAreaMm2, rows, piecesPerRow }: Layout) {
-  // Where rows differ in length, a number of full rows would say nothing certain.
-  const inRows = rows !== null && piecesPerRow !== null && rows * piecesPerRow === pieces;
+function layoutOf({
+  container,
+  pieces,
+  containerAreaMm2,
+  rows,
+  piecesPerRow,
+  rowPieces = null,
+}: Layout) {
+  // Layouts that were kept before each row was counted know the longest only: certain where all are equal.
+  const equal = rows !== null && piecesPerRow !== null && rows * piecesPerRow === pieces;
+  const perRow = rowPieces ?? (equal ? piecesPerRow : null);
   return {
     form: container.form,
     pieces,
     containerAreaMm2,
-    ...(inRows && pieces > 0 && { rowPieces: piecesPerRow }),
+    ...(perRow !== null && pieces > 0 && { rowPieces: perRow }),
   };
 }
 

@@ -25,8 +25,8 @@ export interface RunLayout {
   form: 'panel' | 'strip';
   pieces: number;
   containerAreaMm2: DecimalText;
-  /** pieces in one full row of it, where it lies in rows */
-  rowPieces?: number | undefined;
+  /** pieces in each row of it in cutting order, or in every row; left out where it has no rows */
+  rowPieces?: number | readonly number[] | undefined;
 }
 
 export interface RunLeather {

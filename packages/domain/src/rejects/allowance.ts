@@ -49,3 +49,34 @@ export function upToFull(
   const full = containers * perContainer;
   return { containers, pieces: full, overs: full - pieces };
 }
+
+/**
+ * Rounds a cut count up to full rows: whole containers first, then rows of the next one from its
+ * beginning, each as long as it is.
+ * @param perRow pieces in every row, or in each row of a container in cutting order
+ * @throws InvalidInput
+ */
+export function upToFullRows(
+  pieces: number,
+  perRow: number | readonly number[],
+): { rows: number; pieces: number; overs: number } {
+  if (typeof perRow === 'number') {
+    const { containers: rows, ...full } = upToFull(pieces, perRow);
+    return { rows, ...full };
+  }
+  readWhole(pieces, 'pieces');
+  perRow.forEach((count, at) => readWhole(count, `perRow.${at}`, 1));
+  const perContainer = readWhole(
+    perRow.reduce((sum, count) => sum + count, 0),
+    'perRow',
+    1,
+  );
+  const whole = Math.floor(pieces / perContainer);
+  let [rows, full] = [whole * perRow.length, whole * perContainer];
+  for (const count of perRow) {
+    if (full >= pieces) break;
+    rows += 1;
+    full += count;
+  }
+  return { rows, pieces: full, overs: full - pieces };
+}

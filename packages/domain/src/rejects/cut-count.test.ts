@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { plainAllowance, rolledYield, upToFull } from './allowance.ts';
+import { plainAllowance, rolledYield, upToFull, upToFullRows } from './allowance.ts';
 import { cutCount } from './cut-count.ts';
 
 const aRate = fc.integer({ min: 1, max: 100 }).map((percent) => percent / 100);
@@ -105,6 +105,25 @@ describe('allowances', () => {
     expect(upToFull(109, 20)).toEqual({ containers: 6, pieces: 120, overs: 11 });
     expect(upToFull(120, 20)).toEqual({ containers: 6, pieces: 120, overs: 0 });
     expect(() => upToFull(5, 0)).toThrow('whole number from 1');
+  });
+
+  it('rounds up to rows that differ in length, whole panels first', () => {
+    expect(upToFullRows(9, [5, 4, 5])).toEqual({ rows: 2, pieces: 9, overs: 0 });
+    expect(upToFullRows(10, [5, 4, 5])).toEqual({ rows: 3, pieces: 14, overs: 4 });
+    expect(upToFullRows(30, [5, 4, 5])).toEqual({ rows: 7, pieces: 33, overs: 3 });
+    expect(upToFullRows(0, [5, 4])).toEqual({ rows: 0, pieces: 0, overs: 0 });
+    expect(() => upToFullRows(3, [])).toThrow('perRow');
+    expect(() => upToFullRows(3, [2, 0])).toThrow('perRow.1');
+  });
+
+  it('is the same for equal rows, told one by one or once', () => {
+    const rows = fc.integer({ min: 1, max: 9 });
+    fc.assert(
+      fc.property(fc.nat(500), rows, rows, (pieces, count, each) => {
+        const listed = Array.from({ length: count }, () => each);
+        expect(upToFullRows(pieces, listed)).toEqual(upToFullRows(pieces, each));
+      }),
+    );
   });
 
   it('divides without paying for a last digit', () => {

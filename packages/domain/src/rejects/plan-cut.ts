@@ -1,5 +1,5 @@
 import { InvalidInput } from '../errors/domain-error.ts';
-import { plainAllowance, upToFull } from './allowance.ts';
+import { plainAllowance, upToFull, upToFullRows } from './allowance.ts';
 import { chanceOfEnough } from './chance.ts';
 import { cutCount } from './cut-count.ts';
 
@@ -14,8 +14,8 @@ export interface CutAsked {
   confidence: number;
   /** pieces from a panel or strip */
   perContainer: number;
-  /** pieces in a full row of it; left out where it has no rows */
-  perRow?: number | undefined;
+  /** pieces in each row of it in cutting order, or in every row; left out where it has no rows */
+  perRow?: number | readonly number[] | undefined;
 }
 
 /** How many to cut, and what stands beside it. */
@@ -50,13 +50,13 @@ export function planCut(asked: CutAsked): CutPlan {
     learned ? { good, history: learned, confidence } : { good, rate, confidence },
   );
   const full = upToFull(cut.pieces, perContainer);
-  const rows = perRow === undefined ? null : upToFull(cut.pieces, perRow);
+  const fullRows = perRow === undefined ? null : upToFullRows(cut.pieces, perRow);
   const plain = plainAllowance(good, rate);
   return {
     cutCount: cut.pieces,
     probability: toSixDigits(cut.probability),
     basis: learned ? 'history' : 'rate',
-    fullRows: rows && { rows: rows.containers, pieces: rows.pieces, overs: rows.overs },
+    fullRows,
     containers: full.containers,
     cutPieces: full.pieces,
     overs: full.overs,

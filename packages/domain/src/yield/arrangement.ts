@@ -30,7 +30,7 @@ function rowsOf(placements: readonly NestPlacement[], directionDeg: number): Pla
 
 type Arrangement = Pick<
   Lie,
-  'pitchMm' | 'rowStepMm' | 'shiftMm' | 'rows' | 'piecesPerRow' | 'turned'
+  'pitchMm' | 'rowStepMm' | 'shiftMm' | 'rows' | 'piecesPerRow' | 'rowPieces' | 'turned'
 >;
 
 /** The numbers that go on the ticket; a layout that is not in rows has none. */
@@ -41,7 +41,13 @@ export function arrangement(
   if (!numbers) {
     const none = { pitchMm: null, rowStepMm: null, shiftMm: null };
     const count = placements.length === 0 ? 0 : null;
-    return { ...none, rows: count, piecesPerRow: count, turned: turnedOf([[...placements]]) };
+    return {
+      ...none,
+      rows: count,
+      piecesPerRow: count,
+      rowPieces: null,
+      turned: turnedOf([[...placements]]),
+    };
   }
   const rows = rowsOf(placements, numbers.directionDeg);
   return {
@@ -50,6 +56,7 @@ export function arrangement(
     shiftMm: tidy(remainder(numbers.shiftMm, numbers.pitchMm)),
     rows: rows.length,
     piecesPerRow: Math.max(0, ...rows.map((row) => row.length)),
+    rowPieces: rows.map((row) => row.length),
     turned: turnedOf(rows),
   };
 }

@@ -28,6 +28,7 @@ export function handCount({
     shiftMm: null,
     rows: null,
     piecesPerRow: null,
+    rowPieces: null,
     turned: 'none',
     container,
     containerAreaMm2: toAtMost(area, 3),

@@ -96,7 +96,10 @@ export interface Lie {
   /** by how much a row is shifted along itself against the one before */
   shiftMm: number | null;
   rows: number | null;
+  /** of the longest row */
   piecesPerRow: number | null;
+  /** of each row, in cutting order; rows at a flaw or of round pieces differ in length */
+  rowPieces: number[] | null;
   turned: Turned;
   containerAreaMm2: DecimalText;
   pieceAreaMm2: DecimalText | null;

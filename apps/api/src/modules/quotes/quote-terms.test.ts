@@ -9,6 +9,8 @@ import {
   type Quote,
   type QuoteRow,
   type RunBasis,
+  type Today,
+  type WeekStart,
 } from '@hidewright/contract';
 import { priceRun } from '@hidewright/domain';
 import { readyForTheBench, ticketOf, type BenchShop } from '../../testing/bench-shop.ts';
@@ -149,11 +151,10 @@ describe('an option', () => {
     });
     const ticket = await ticketOf(ready, order);
     expect(ticket.hardware.map(({ name }) => name)).toEqual(['Rivet 9 mm, brass']);
-    await ready.shop
-      .as('maker')
-      .post(`/api/jobs/${ticket.id}/finish`)
-      .send({ good: 50 })
-      .expect(201);
+    const work = (what: string, body: object) =>
+      ready.shop.as('maker').post(`/api/jobs/${ticket.id}/${what}`).send(body).expect(201);
+    await work('logs', { stepId: ticket.steps[1]?.id, good: 50, minutes: '120' });
+    await work('finish', { good: 50 });
     const draft = { orderId: order.id, taxRateId: null };
     const invoice = (
       await ready.shop.as('bookkeeper').post('/api/invoices').send(draft).expect(201)
@@ -165,5 +166,11 @@ describe('an option', () => {
       'Tooling, charged once',
     ]);
     expect(invoice.net).toBe(order.total);
+
+    // Two logged hours: what the option left, by the hour and for a week's mix.
+    const today = (await owner().get('/api/today').expect(200)).body as Today;
+    expect(today.earned?.jobs[0]?.perBenchHour).toBe((Number(offered?.left) / 2).toFixed(2));
+    const start = (await owner().get('/api/week-mixes/start').expect(200)).body as WeekStart;
+    expect(start.week.kinds[0]).toMatchObject({ left: offered?.left, benchMinutes: '120' });
   });
 });

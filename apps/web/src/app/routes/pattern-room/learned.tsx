@@ -31,7 +31,7 @@ export function Component() {
   const [without, setWithout] = useState<number[]>([]);
   const [search, setSearch] = useSearchParams();
   const customerId = Number(search.get('customer')) || undefined;
-  const { data: learned } = useQuery({
+  const { data: learned, isPlaceholderData } = useQuery({
     ...learnedQuery(id, without, customerId),
     placeholderData: keepPreviousData,
   });
@@ -63,7 +63,12 @@ export function Component() {
           {learned.runs.length > 0 && <LearnedTogether learned={learned} />}
         </div>
         {session.person?.role === 'owner' && learned.runs.length > 0 && (
-          <TakeLearned key={learned.customerId} learned={learned} without={without} />
+          <TakeLearned
+            key={learned.customerId}
+            learned={learned}
+            without={without}
+            waits={isPlaceholderData}
+          />
         )}
       </div>
     </>

@@ -12,12 +12,14 @@ import { useTakeLearned } from '../patterns.mutations.ts';
 interface TakeLearnedProps {
   learned: Learned;
   without: readonly number[];
+  /** The figures are still those of other runs. */
+  waits: boolean;
 }
 
 const keyOf = ({ what, step, hardwareId }: Offered) => `${what} ${step ?? ''} ${hardwareId ?? ''}`;
 
 /** The figures that can go into the pattern: all of them, or one by one. */
-export function TakeLearned({ learned, without }: TakeLearnedProps) {
+export function TakeLearned({ learned, without, waits }: TakeLearnedProps) {
   const send = useTakeLearned();
   const [left, setLeft] = useState<readonly string[]>([]);
   const [problem, setProblem] = useState<string>();
@@ -88,7 +90,7 @@ export function TakeLearned({ learned, without }: TakeLearnedProps) {
           tone="primary"
           className="mt-4"
           busy={send.isPending}
-          disabled={taken.length === 0}
+          disabled={taken.length === 0 || waits}
           onClick={() => void use()}
         >
           {taken.length === offered.length ? 'Use these' : `Use ${taken.length} of these`}
