@@ -1,14 +1,25 @@
 import { Type } from '@mikro-orm/core';
 
-/** A snapshot kept as JSON text: STRICT tables know no JSON type. */
+/**
+ * A snapshot kept as JSON text: STRICT tables know no JSON type. A value is replaced, never changed in place: the
+ * text of each is kept beside it, so that a flush does not write out every snapshot at hand again to compare it.
+ */
 export class JsonText extends Type<unknown, string | null> {
   override convertToDatabaseValue(value: unknown): string | null {
     if (value === null || value === undefined) return null;
-    return JSON.stringify(value);
+    if (typeof value !== 'object') return JSON.stringify(value);
+    const known = texts.get(value);
+    if (known !== undefined) return known;
+    const text = JSON.stringify(value);
+    texts.set(value, text);
+    return text;
   }
 
   override convertToJSValue(value: unknown): unknown {
-    return typeof value === 'string' ? (JSON.parse(value) as unknown) : value;
+    if (typeof value !== 'string') return value;
+    const read = JSON.parse(value) as unknown;
+    if (typeof read === 'object' && read !== null) texts.set(read, value);
+    return read;
   }
 
   override compareAsType(): string {
@@ -23,3 +34,6 @@ export class JsonText extends Type<unknown, string | null> {
     return 'text';
   }
 }
+
+/** The text of each value that was read or written. */
+const texts = new WeakMap<object, string>();
