@@ -23,6 +23,7 @@ export async function startServer(dataDir: string, planted?: string): Promise<Se
       PORT: '0',
       HOST: '127.0.0.1',
       SMTP_URL: '',
+      SIGN_IN_LIMIT: '1000',
       LOG_LEVEL: 'info',
     },
     stdio: ['ignore', 'pipe', 'inherit'],

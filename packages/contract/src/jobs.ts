@@ -113,6 +113,12 @@ export const logBench = endpoint({
   reply: job,
 });
 
+/** So much leather of a named lot, or so many of a kind of hardware. */
+const amountOfStock = z.union([
+  z.strictObject({ lotId: id, areaMm2: someArea }),
+  z.strictObject({ hardwareId: id, quantity: positiveCount }),
+]);
+
 export const takeForJob = endpoint({
   method: 'POST',
   path: '/jobs/{id}/takings',
@@ -120,10 +126,29 @@ export const takeForJob = endpoint({
   access: bench,
   creates: true,
   params: idParams,
-  body: z.union([
-    z.strictObject({ lotId: id, areaMm2: someArea }),
-    z.strictObject({ hardwareId: id, quantity: positiveCount }),
-  ]),
+  body: amountOfStock,
+  reply: job,
+});
+
+export const holdForJob = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/reservations',
+  summary: 'Hold leather of a lot, or hardware, for the job: nobody else can take it',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: amountOfStock,
+  reply: job,
+});
+
+export const letGo = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/releases',
+  summary: 'Let go of what is held for the job of a lot or of hardware; it is free again',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: z.union([z.strictObject({ lotId: id }), z.strictObject({ hardwareId: id })]),
   reply: job,
 });
 

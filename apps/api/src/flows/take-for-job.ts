@@ -1,14 +1,10 @@
 import { Decimal } from 'decimal.js';
 import { scaled } from '../db/columns/scaled-decimal.ts';
-import { invalid, notFound } from '../http/problem.ts';
 import { findJob, requireJobState } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
-import { Leather } from '../modules/leathers/leather.entity.ts';
-import { Lot } from '../modules/lots/lot.entity.ts';
-import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
-import { definitionOf } from '../modules/patterns/pattern-versions.ts';
 import { takeStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
+import { requireItsLeather } from './its-leather.ts';
 import { startIfReady } from './start-job.ts';
 
 export type Taking = { lotId: number; areaMm2: string } | { hardwareId: number; quantity: number };
@@ -35,15 +31,4 @@ export async function takeForJob(work: Work, jobId: number, taking: Taking): Pro
   }
   await startIfReady(work, job);
   return job;
-}
-
-async function requireItsLeather({ em }: Work, job: Job, lotId: number): Promise<void> {
-  const lot = await em.findOne(Lot, lotId);
-  if (lot === null) throw notFound('lot');
-  const version = await em.findOneOrFail(PatternVersion, job.patternVersionId);
-  const { leatherId } = definitionOf(version);
-  if (lot.leatherId === leatherId) return;
-  const needed = await em.findOneOrFail(Leather, leatherId);
-  const message = `Lot ${lot.tag} is another leather; ${job.number} needs ${needed.name}. Choose a lot of that.`;
-  throw invalid([{ field: 'lotId', message }]);
 }

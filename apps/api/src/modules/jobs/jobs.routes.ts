@@ -2,6 +2,8 @@ import { Router } from 'express';
 import {
   compareJob,
   finishJob as finishJobEndpoint,
+  holdForJob as holdForJobEndpoint,
+  letGo,
   listJobs,
   logBench as logBenchEndpoint,
   pauseJob as pauseJobEndpoint,
@@ -15,6 +17,7 @@ import type { Context } from '../../context.ts';
 import { compareFinished } from '../../flows/compare-job.ts';
 import { explainJob } from '../../flows/explain-job.ts';
 import { finishJob } from '../../flows/finish-job.ts';
+import { holdForJob, letGoForJob } from '../../flows/hold-for-job.ts';
 import { logBench } from '../../flows/log-bench.ts';
 import { pauseJob, resumeJob } from '../../flows/pause-job.ts';
 import { planBench } from '../../flows/plan-bench.ts';
@@ -43,6 +46,16 @@ export function jobRoutes(context: Context): Router {
 
   serve(router, context, takeForJobEndpoint, async (work, { params, body }) => {
     await takeForJob(work, params.id, body);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, holdForJobEndpoint, async (work, { params, body }) => {
+    await holdForJob(work, params.id, body);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, letGo, async (work, { params, body }) => {
+    await letGoForJob(work, params.id, body);
     return readTicket(work.em, params.id);
   });
 

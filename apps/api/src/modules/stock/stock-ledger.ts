@@ -156,14 +156,21 @@ export async function adjustStock(
   };
 }
 
-/** Lets go of everything that is still held for a job. */
-export async function releaseReservations(work: Work, jobId: number): Promise<void> {
-  for (const reservation of await openReservations(work.em, { jobId })) {
+/** Lets go of everything that is still held for a job, or of one item; gives how much that was. */
+export async function releaseReservations(
+  work: Work,
+  jobId: number,
+  item?: StockItem,
+): Promise<number> {
+  let released = 0;
+  for (const reservation of await openReservations(work.em, { jobId, ...(item && keysOf(item)) })) {
     const balance = await balanceOf(work.em, itemOf(reservation));
     balance.reserved -= reservation.open;
+    released += reservation.open;
     reservation.open = 0;
   }
   await work.em.flush();
+  return released;
 }
 
 async function openReservations(

@@ -1,7 +1,16 @@
-import { finishJob, pauseJob, resumeJob, takeForJob } from '@hidewright/contract';
+import {
+  finishJob,
+  holdForJob,
+  letGo,
+  pauseJob,
+  resumeJob,
+  takeForJob,
+} from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
 
 export const useTakeForJob = () => useSend(takeForJob);
+export const useHoldForJob = () => useSend(holdForJob);
+export const useLetGo = () => useSend(letGo);
 export const useFinishJob = () => useSend(finishJob);
 export const usePauseJob = () => useSend(pauseJob);
 export const useResumeJob = () => useSend(resumeJob);

@@ -8,7 +8,7 @@ import { say } from '../../../components/toast.ts';
 import { ApiProblem } from '../../../lib/api-problem.ts';
 import { areaText, countText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { useTakeForJob } from '../jobs.mutations.ts';
+import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
 import { TakeOther } from './take-other.tsx';
 
 interface StockCardProps {
@@ -19,9 +19,16 @@ interface StockCardProps {
 /** Leather and hardware of a job: what is held for it, what it has taken, and one press to take what is held. */
 export function StockCard({ job, canTake }: StockCardProps) {
   const { areaUnit } = useWorkshop();
-  const { mutate, isPending, error, variables } = useTakeForJob();
+  const { mutate, isPending, error: notTaken, variables } = useTakeForJob();
   const take = (body: Parameters<typeof mutate>[0]['body'], sentence: string) =>
     mutate({ params: { id: job.id }, body }, { onSuccess: () => say(sentence) });
+  const letting = useLetGo();
+  const go = (body: Parameters<typeof letting.mutate>[0]['body'], what: string) =>
+    letting.mutate(
+      { params: { id: job.id }, body },
+      { onSuccess: () => say(`${what} is free again.`) },
+    );
+  const error = notTaken ?? letting.error;
   const busyWith = (field: 'lotId' | 'hardwareId', id: number) =>
     isPending && variables.body[field as never] === id;
   return (
@@ -29,7 +36,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
       title="Leather and hardware"
       subtitle={`${areaText(job.neededAreaMm2, areaUnit)} of ${job.leatherName} needed`}
     >
-      {error && (
+      {error !== null && (
         <Notice tone="danger" live className="mb-4">
           {error instanceof ApiProblem ? error.detail : 'That did not work. Try again.'}
         </Notice>
@@ -41,6 +48,13 @@ export function StockCard({ job, canTake }: StockCardProps) {
             title={<LotTitle lot={lot} />}
             detail={lotLine(lot, (mm2) => areaText(mm2, areaUnit))}
           >
+            {job.state !== 'finished' && lot.heldAreaMm2 !== '0' && (
+              <LetGo
+                busy={letting.isPending && letting.variables.body[lotKey] === lot.lotId}
+                what={`lot ${lot.tag}`}
+                onClick={() => go({ lotId: lot.lotId }, `lot ${lot.tag}`)}
+              />
+            )}
             {canTake && lot.heldAreaMm2 !== '0' && (
               <Button
                 size="bench"
@@ -72,6 +86,15 @@ export function StockCard({ job, canTake }: StockCardProps) {
               title={<strong>{item.name}</strong>}
               detail={hardwareLine(item)}
             >
+              {job.state !== 'finished' && item.held > 0 && (
+                <LetGo
+                  busy={
+                    letting.isPending && letting.variables.body[hardwareKey] === item.hardwareId
+                  }
+                  what={item.name}
+                  onClick={() => go({ hardwareId: item.hardwareId }, item.name)}
+                />
+              )}
               {canTake && item.held > 0 && (
                 <Button
                   size="bench"
@@ -91,8 +114,19 @@ export function StockCard({ job, canTake }: StockCardProps) {
           ))}
         </ul>
       )}
-      {canTake && <TakeOther job={job} />}
+      {job.state !== 'finished' && <TakeOther job={job} canTake={canTake} />}
     </Card>
+  );
+}
+
+const lotKey = 'lotId' as never;
+const hardwareKey = 'hardwareId' as never;
+
+function LetGo({ what, busy, onClick }: { what: string; busy: boolean; onClick: () => void }) {
+  return (
+    <Button tone="quiet" className="min-h-11 print:hidden" busy={busy} onClick={onClick}>
+      Let go<span className="sr-only"> of {what}</span>
+    </Button>
   );
 }
 
@@ -111,7 +145,7 @@ function Line({
         <div>{title}</div>
         <div className="text-sm text-ink-soft">{detail}</div>
       </div>
-      {children}
+      <div className="flex flex-wrap gap-2">{children}</div>
     </li>
   );
 }

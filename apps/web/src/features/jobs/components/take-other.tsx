@@ -1,5 +1,4 @@
-import type { Job } from '@hidewright/contract';
-import { takeForJob } from '@hidewright/contract';
+import { takeForJob, type Job } from '@hidewright/contract';
 import { useState } from 'react';
 import { z } from 'zod';
 import { AreaField } from '../../../components/area-field.tsx';
@@ -11,65 +10,93 @@ import { SelectField } from '../../../components/select-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { areaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { useTakeForJob } from '../jobs.mutations.ts';
+import { useHoldForJob, useTakeForJob } from '../jobs.mutations.ts';
 
-/** Another amount, or from another lot, than what is held. */
-export function TakeOther({ job }: { job: Job }) {
-  const [open, setOpen] = useState<'leather' | 'hardware'>();
+const does = {
+  take: { leather: 'Take leather', hardware: 'Take hardware', submit: 'Take it' },
+  hold: { leather: 'Hold leather', hardware: 'Hold hardware', submit: 'Hold it' },
+};
+type Deed = keyof typeof does;
+type Kind = 'leather' | 'hardware';
+
+interface TakeOtherProps {
+  job: Job;
+  /** A job that waits or is paused can hold, and takes nothing. */
+  canTake: boolean;
+}
+
+/** Another amount, or from another lot, than what is held; or more to be held. */
+export function TakeOther({ job, canTake }: TakeOtherProps) {
+  const [open, setOpen] = useState<{ deed: Deed; kind: Kind }>();
   const close = () => setOpen(undefined);
+  const kinds = {
+    leather: job.lots.length > 0,
+    hardware: job.hardware.length > 0,
+  };
+  const button = (deed: Deed, kind: Kind, word: string) =>
+    kinds[kind] && (
+      <Button key={word} className="min-h-11" onClick={() => setOpen({ deed, kind })}>
+        {word}
+      </Button>
+    );
   return (
     <div className="mt-3 flex flex-wrap gap-2">
-      {job.lots.length > 0 && (
-        <Button className="min-h-11" onClick={() => setOpen('leather')}>
-          Take another amount of leather
-        </Button>
-      )}
-      {job.hardware.length > 0 && (
-        <Button className="min-h-11" onClick={() => setOpen('hardware')}>
-          Take other hardware
-        </Button>
-      )}
-      <Dialog open={open === 'leather'} onOpenChange={close} title="Take leather">
-        <TakeLeather job={job} onDone={close} />
-      </Dialog>
-      <Dialog open={open === 'hardware'} onOpenChange={close} title="Take hardware">
-        <TakeHardware job={job} onDone={close} />
+      {canTake && button('take', 'leather', 'Take another amount of leather')}
+      {canTake && button('take', 'hardware', 'Take other hardware')}
+      {button('hold', 'leather', 'Hold more leather')}
+      {button('hold', 'hardware', 'Hold more hardware')}
+      <Dialog
+        open={open !== undefined}
+        onOpenChange={close}
+        title={open && does[open.deed][open.kind]}
+      >
+        {open?.kind === 'leather' && <MoveLeather job={job} deed={open.deed} onDone={close} />}
+        {open?.kind === 'hardware' && <MoveHardware job={job} deed={open.deed} onDone={close} />}
       </Dialog>
     </div>
   );
 }
 
-const [leatherTaking, hardwareTaking] = shapesOf();
+const [ofLeather, ofHardware] = shapesOf();
 
-/** The two shapes of a taking, as the contract has them. */
+/** The two shapes of an amount of stock, as the contract has them. */
 function shapesOf() {
   if (!(takeForJob.body instanceof z.ZodUnion))
     throw new TypeError('A taking is of leather or of hardware');
   return takeForJob.body.options;
 }
 
-interface TakeProps {
+interface MoveProps {
   job: Job;
+  deed: Deed;
   onDone: () => void;
 }
 
-function TakeLeather({ job, onDone }: TakeProps) {
+function useDeed({ job, deed, onDone }: MoveProps) {
+  const take = useTakeForJob();
+  const hold = useHoldForJob();
+  const { mutateAsync } = deed === 'take' ? take : hold;
+  return async (body: Parameters<typeof mutateAsync>[0]['body'], from: string) => {
+    await mutateAsync({ params: { id: job.id }, body });
+    say(deed === 'take' ? `Taken from the ${from}.` : `Held for ${job.number}.`);
+    onDone();
+  };
+}
+
+function MoveLeather(props: MoveProps) {
   const { areaUnit } = useWorkshop();
-  const { mutateAsync } = useTakeForJob();
+  const send = useDeed(props);
+  const { job, deed } = props;
   const choices = job.lots.map((lot) => ({
     value: lot.lotId,
     label: `${lot.tag}: ${areaText(lot.freeAreaMm2, areaUnit)} free, ${areaText(lot.heldAreaMm2, areaUnit)} held`,
   }));
   return (
     <Form
-      schema={leatherTaking}
+      schema={ofLeather}
       defaults={{ ...(job.lots[0] && { lotId: job.lots[0].lotId }), areaMm2: '' }}
-      onSend={async (body) => {
-        await mutateAsync({ params: { id: job.id }, body });
-        say('Taken from the rack.');
-        onDone();
-      }}
-      submitWord="Take it"
+      onSend={(body) => send(body, 'rack')}
+      submitWord={does[deed].submit}
       submitSize="bench"
     >
       <SelectField name="lotId" label="Lot" choices={choices} />
@@ -78,22 +105,19 @@ function TakeLeather({ job, onDone }: TakeProps) {
   );
 }
 
-function TakeHardware({ job, onDone }: TakeProps) {
-  const { mutateAsync } = useTakeForJob();
+function MoveHardware(props: MoveProps) {
+  const send = useDeed(props);
+  const { job, deed } = props;
   const choices = job.hardware.map((item) => ({
     value: item.hardwareId,
     label: `${item.name}: ${item.free} free`,
   }));
   return (
     <Form
-      schema={hardwareTaking}
+      schema={ofHardware}
       defaults={job.hardware[0] ? { hardwareId: job.hardware[0].hardwareId } : {}}
-      onSend={async (body) => {
-        await mutateAsync({ params: { id: job.id }, body });
-        say('Taken from the shelf.');
-        onDone();
-      }}
-      submitWord="Take it"
+      onSend={(body) => send(body, 'shelf')}
+      submitWord={does[deed].submit}
       submitSize="bench"
     >
       <SelectField name="hardwareId" label="Hardware" choices={choices} />
