@@ -74,7 +74,7 @@ describe('what the runs offer', () => {
     expect(offeredBy(materials)).toMatchObject([
       {
         ...{ what: 'leather', now: 'as the layout', found: 'layout and 4.5\u202f%', changes: true },
-        behind: '3 runs, −1\u202f% to 9\u202f% beside the layout',
+        behind: '3 runs, from 1\u202f% less to 9\u202f% more',
       },
       {
         ...{ what: 'hardware', hardwareId: 7, name: 'Rivet 9 mm: lost', now: '2\u202f%' },

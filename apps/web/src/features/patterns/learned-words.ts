@@ -36,12 +36,18 @@ function leatherOffered({ saidExtraPercent, extra }: Learned['leather']): Offere
       now: words(saidExtraPercent),
       found: words(extraPercent),
       behind:
-        runs === 1
-          ? '1 run'
-          : `${runsWord(runs)}, ${percentText(leastPercent)} to ${percentText(mostPercent)} beside the layout`,
+        leastPercent === mostPercent
+          ? `${runsWord(runs)}, ${besideLayout(leastPercent)}`
+          : `${runsWord(runs)}, from ${besideLayout(leastPercent)} to ${besideLayout(mostPercent)}`,
       changes: Number(extraPercent) !== Number(saidExtraPercent),
     },
   ];
+}
+
+function besideLayout(percent: string): string {
+  const value = Number(percent);
+  if (value === 0) return 'as the layout';
+  return `${percentText(String(Math.abs(value)))} ${value < 0 ? 'less' : 'more'}`;
 }
 
 function hardwareOffered({

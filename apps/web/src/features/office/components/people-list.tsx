@@ -8,8 +8,18 @@ import { Wage } from './person-wage.tsx';
 import { useChangePerson } from '../office.mutations.ts';
 
 const columns: readonly Column<Person>[] = [
-  { id: 'name', header: 'Name', value: (person) => person.name, onPhone: 'title' },
-  { id: 'email', header: 'E-mail address', value: (person) => person.email },
+  {
+    id: 'name',
+    header: 'Name',
+    value: (person) => `${person.name} ${person.email}`,
+    cell: (person) => (
+      <span className="block">
+        {person.name}
+        <span className="block text-sm text-ink-soft">{person.email}</span>
+      </span>
+    ),
+    onPhone: 'title',
+  },
   { id: 'role', header: 'Role', value: (person) => person.role },
   {
     id: 'wage',
