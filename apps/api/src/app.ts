@@ -33,6 +33,7 @@ import { purchaseOrderRoutes } from './modules/purchase-orders/purchase-orders.r
 import { quoteRoutes } from './modules/quotes/quotes.routes.ts';
 import { searchRoutes } from './modules/search/search.routes.ts';
 import { stockRoutes } from './modules/stock/stock.routes.ts';
+import { supplierOfferRoutes } from './modules/supplier-offers/supplier-offers.routes.ts';
 import { supplierRoutes } from './modules/suppliers/suppliers.routes.ts';
 import { taxRateRoutes } from './modules/tax-rates/tax-rates.routes.ts';
 import { timeReadingRoutes } from './modules/time-readings/time-readings.routes.ts';
@@ -71,6 +72,7 @@ const rooms: ((context: Context) => Router)[] = [
   lotSearchRoutes,
   hardwareRoutes,
   supplierRoutes,
+  supplierOfferRoutes,
   purchaseOrderRoutes,
   stockRoutes,
   invoiceRoutes,

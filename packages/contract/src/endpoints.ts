@@ -25,6 +25,7 @@ import * as quotes from './quotes.ts';
 import * as search from './search.ts';
 import * as session from './session.ts';
 import * as stock from './stock.ts';
+import * as supplierOffers from './supplier-offers.ts';
 import * as suppliers from './suppliers.ts';
 import * as system from './system.ts';
 import * as taxRates from './tax-rates.ts';
@@ -68,6 +69,7 @@ const rooms: Record<string, unknown>[] = [
   lotSearches,
   hardware,
   suppliers,
+  supplierOffers,
   purchaseOrders,
   stock,
   invoices,

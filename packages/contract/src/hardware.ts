@@ -12,6 +12,7 @@ import {
   unitPrice,
   version,
 } from './fields.ts';
+import { hardwareDetails, hardwareDetailsKept, hardwareDetailsUnsaid } from './hardware-details.ts';
 
 export const hardwareKinds = ['hardware', 'supplies'] as const;
 
@@ -22,6 +23,7 @@ const typed = {
   packSize: positiveCount,
   reorderAt: count,
   supplierId: id.nullable(),
+  ...hardwareDetails,
 };
 
 export const hardware = z
@@ -34,7 +36,9 @@ export const hardware = z
     reorderAt: z.int(),
     supplierId: id.nullable(),
     supplierName: z.string().nullable(),
+    ...hardwareDetailsKept,
     active: z.boolean(),
+    /** Of a kit: the most that its parts make up. */
     onHand: z.int(),
     reserved: z.int(),
     free: z.int(),
@@ -84,6 +88,7 @@ export const addHardware = endpoint({
     packSize: typed.packSize.default(1),
     reorderAt: typed.reorderAt.default(0),
     supplierId: typed.supplierId.default(null),
+    ...hardwareDetailsUnsaid,
   }),
   reply: hardware,
 });

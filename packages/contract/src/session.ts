@@ -22,6 +22,7 @@ export const session = z
         currency: z.string(),
         minorDigits: z.int(),
         areaUnit: z.enum(['ft2', 'dm2', 'm2']),
+        areaShown: z.enum(['tenth', 'quarter']),
         lengthUnit: z.enum(['mm', 'in']),
         timeZone: z.string(),
         today: z.string(),

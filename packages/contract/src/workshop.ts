@@ -33,6 +33,8 @@ const settings = {
   name: line(80, 'Enter the name of the shop.'),
   currency: z.string().regex(/^[A-Z]{3}$/, 'Choose a currency.'),
   areaUnit: z.enum(['ft2', 'dm2', 'm2']),
+  /** How finely areas on the rack are shown where they are in ft². */
+  areaShown: z.enum(['tenth', 'quarter'], 'Choose tenths or quarters.'),
   lengthUnit: z.enum(['mm', 'in']),
   timeZone,
   targetPerHour: money,
@@ -70,6 +72,7 @@ export const workshop = z
     name: z.string(),
     currency: z.string(),
     areaUnit: settings.areaUnit,
+    areaShown: settings.areaShown,
     lengthUnit: settings.lengthUnit,
     timeZone: z.string(),
     targetPerHour: confidential(z.string()),

@@ -104,6 +104,8 @@ export * from './stock/reorder-point.ts';
 export * from './stock/forecast.ts';
 export * from './stock/stock-cost.ts';
 export * from './stock/available-to-promise.ts';
+export * from './stock/supplier-offer.ts';
+export * from './stock/best-buy.ts';
 
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';

@@ -4,6 +4,8 @@ import { Customer } from '../modules/customers/customer.entity.ts';
 import { StoredFile } from '../modules/files/stored-file.entity.ts';
 import { Design } from '../modules/designs/design.entity.ts';
 import { Hardware } from '../modules/hardware/hardware.entity.ts';
+import { KitPart } from '../modules/hardware/kit-part.entity.ts';
+import { StandIn } from '../modules/hardware/stand-in.entity.ts';
 import { InvoiceLine } from '../modules/invoices/invoice-line.entity.ts';
 import { InvoiceTax } from '../modules/invoices/invoice-tax.entity.ts';
 import { Invoice } from '../modules/invoices/invoice.entity.ts';
@@ -31,6 +33,7 @@ import { Quote } from '../modules/quotes/quote.entity.ts';
 import { Reservation } from '../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
+import { SupplierOffer } from '../modules/supplier-offers/supplier-offer.entity.ts';
 import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { TaxRate } from '../modules/tax-rates/tax-rate.entity.ts';
 import { TimeReading } from '../modules/time-readings/time-reading.entity.ts';
@@ -56,6 +59,7 @@ export const entities = [
   InvoiceTax,
   Job,
   JobStep,
+  KitPart,
   Leather,
   Lot,
   Order,
@@ -73,11 +77,13 @@ export const entities = [
   Quote,
   QuoteBreak,
   Reservation,
+  StandIn,
   StockBalance,
   StockMovement,
   StoredFile,
   StoredLayout,
   Supplier,
+  SupplierOffer,
   TaxRate,
   TimeReading,
   Tool,

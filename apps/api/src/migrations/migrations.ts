@@ -6,6 +6,7 @@ import { TheTools } from './migration-20261201-the-tools.ts';
 import { TheWorkings } from './migration-20261201-the-workings.ts';
 import { ThePhotos } from './migration-20261202-the-photos.ts';
 import { TheDesigns } from './migration-20261203-the-designs.ts';
+import { TheOffers } from './migration-20261203-the-offers.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -17,4 +18,5 @@ export const migrations = [
   { name: 'migration-20261201-the-workings', class: TheWorkings },
   { name: 'migration-20261202-the-photos', class: ThePhotos },
   { name: 'migration-20261203-the-designs', class: TheDesigns },
+  { name: 'migration-20261203-the-offers', class: TheOffers },
 ];

@@ -1,11 +1,24 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { HardwareUnit } from '@hidewright/contract';
 import type { Decimal } from 'decimal.js';
-import { UnitPriceType } from '../../db/columns/columns.ts';
+import { LengthType, UnitPriceType } from '../../db/columns/columns.ts';
 
 /** Rivets, rings and snaps, and supplies such as boxes and thread: counted. */
 @Entity({ tableName: 'hardware' })
 export class Hardware {
-  [OptionalProps]?: 'packSize' | 'reorderAt' | 'active' | 'version';
+  [OptionalProps]?:
+    | 'packSize'
+    | 'reorderAt'
+    | 'unit'
+    | 'metal'
+    | 'colour'
+    | 'bin'
+    | 'fromCustomer'
+    | 'priceFromParts'
+    | 'settingDie'
+    | 'settingDieHere'
+    | 'active'
+    | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -28,6 +41,46 @@ export class Hardware {
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   supplierId: number | null = null;
+
+  /** What one of it is: counted whole. */
+  @Property({ type: 'text', columnType: 'text' })
+  unit: HardwareUnit = 'piece';
+
+  @Property({ type: 'text', columnType: 'text' })
+  metal = '';
+
+  @Property({ type: 'text', columnType: 'text' })
+  colour = '';
+
+  /** Where it lies. */
+  @Property({ type: 'text', columnType: 'text' })
+  bin = '';
+
+  /** The customer brings it: it is counted, and never bought. */
+  @Property({ type: 'boolean', columnType: 'integer' })
+  fromCustomer = false;
+
+  /** A kit that costs what its parts cost. */
+  @Property({ type: 'boolean', columnType: 'integer' })
+  priceFromParts = false;
+
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  postLengthMm: Decimal | null = null;
+
+  /** The folded stack that it holds, from the thinnest … */
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  stackMinMm: Decimal | null = null;
+
+  /** … to the thickest. */
+  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  stackMaxMm: Decimal | null = null;
+
+  /** The die that sets it, by the name or number that the shop gives it. */
+  @Property({ type: 'text', columnType: 'text' })
+  settingDie = '';
+
+  @Property({ type: 'boolean', columnType: 'integer' })
+  settingDieHere = true;
 
   @Property({ type: 'boolean', columnType: 'integer' })
   active = true;

@@ -4,6 +4,8 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText, priceText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
+import { kitCounts, kitPrice } from './kit-counts.ts';
+import { readRelated, type Related } from './related-hardware.ts';
 
 interface Asked {
   id?: number | undefined;
@@ -23,11 +25,23 @@ interface Row {
   reorder_at: number;
   supplier_id: number | null;
   supplier_name: string | null;
+  unit: HardwareReply['unit'];
+  metal: string;
+  colour: string;
+  bin: string;
+  from_customer: number;
+  price_from_parts: number;
+  post_length_mm: number | null;
+  stack_min_mm: number | null;
+  stack_max_mm: number | null;
+  setting_die: string;
+  setting_die_here: number;
   active: number;
   on_hand: number;
   reserved: number;
   on_order: number;
   value: number;
+  short: number;
   version: number;
 }
 
@@ -42,8 +56,9 @@ const counted = `
   LEFT JOIN supplier s ON s.id = h.supplier_id
   LEFT JOIN stock_balance b ON b.hardware_id = h.id`;
 
-/** Below the owner's mark although what is ordered is counted in. */
-const isShort = '(MAX(0, on_hand - reserved) + on_order < reorder_at)';
+/** Below the owner's mark although what is ordered is counted in; nobody buys kits or what customers bring. */
+const isShort = `(MAX(0, on_hand - reserved) + on_order < reorder_at AND from_customer = 0
+  AND NOT EXISTS (SELECT 1 FROM kit_part k WHERE k.kit_id = c.id))`;
 
 /** Hardware with its counts, newest first. */
 export async function readHardwareList(em: EntityManager, asked: Asked): Promise<HardwareReply[]> {
@@ -54,9 +69,13 @@ export async function readHardwareList(em: EntityManager, asked: Asked): Promise
     ...when(asked.q, 'name LIKE ?', (q) => [`%${q}%`]),
     ...when(asked.short, `${isShort} = ?`, (short) => [short === 'yes' ? 1 : 0]),
   ]);
-  const sql = `SELECT * FROM (${counted}) ${where} ORDER BY id DESC LIMIT ?`;
+  const sql = `SELECT *, ${isShort} AS short FROM (${counted}) c ${where} ORDER BY id DESC LIMIT ?`;
   const rows = await em.execute<Row[]>(sql, [...values, asked.limit ?? 1]);
-  return rows.map(toReply);
+  const related = await readRelated(
+    em,
+    rows.map(({ id }) => id),
+  );
+  return rows.map((row) => toReply(row, related));
 }
 
 /** @throws {Problem} 404 */
@@ -66,24 +85,46 @@ export async function readOneHardware(em: EntityManager, id: number): Promise<Ha
   return found;
 }
 
-function toReply(row: Row): HardwareReply {
-  const free = Math.max(0, row.on_hand - row.reserved);
+function toReply(row: Row, related: Related): HardwareReply {
+  const parts = related.partsOf(row.id);
+  const isKit = parts.length > 0;
+  const price = isKit && row.price_from_parts === 1 ? kitPrice(parts) : unscaled(row.unit_price, 4);
   return {
     id: row.id,
     name: row.name,
     kind: row.kind,
-    unitPrice: priceText(unscaled(row.unit_price, 4)),
+    unitPrice: priceText(price),
     packSize: row.pack_size,
     reorderAt: row.reorder_at,
     supplierId: row.supplier_id,
     supplierName: row.supplier_name,
+    ...detailsOf(row),
+    ...related.repliesFor(row.id),
     active: row.active === 1,
-    onHand: row.on_hand,
-    reserved: row.reserved,
-    free,
-    onOrder: row.on_order,
-    short: free + row.on_order < row.reorder_at,
+    ...(isKit ? kitCounts(parts) : ownCounts(row)),
+    short: row.short === 1,
     valueOnHand: moneyText(unscaled(row.value, 2)),
     version: row.version,
+  };
+}
+
+function ownCounts({ on_hand: onHand, reserved, on_order: onOrder }: Row) {
+  return { onHand, reserved, free: Math.max(0, onHand - reserved), onOrder };
+}
+
+function detailsOf(row: Row) {
+  const lengthText = (kept: number | null) => (kept === null ? null : unscaled(kept, 6).toFixed());
+  return {
+    unit: row.unit,
+    metal: row.metal,
+    colour: row.colour,
+    bin: row.bin,
+    fromCustomer: row.from_customer === 1,
+    priceFromParts: row.price_from_parts === 1,
+    postLengthMm: lengthText(row.post_length_mm),
+    stackMinMm: lengthText(row.stack_min_mm),
+    stackMaxMm: lengthText(row.stack_max_mm),
+    settingDie: row.setting_die,
+    settingDieHere: row.setting_die_here === 1,
   };
 }

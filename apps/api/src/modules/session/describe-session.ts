@@ -27,6 +27,7 @@ function inWords(workshop: Workshop, context: Context): NonNullable<Session['wor
     currency: workshop.currency,
     minorDigits: minorDigits(workshop.currency),
     areaUnit: workshop.areaUnit,
+    areaShown: workshop.areaShown,
     lengthUnit: workshop.lengthUnit,
     timeZone: workshop.timeZone,
     today: dayIn(workshop.timeZone, context.clock.now()),

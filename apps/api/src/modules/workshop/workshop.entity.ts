@@ -16,6 +16,7 @@ export class Workshop {
   [OptionalProps]?:
     | 'currency'
     | 'areaUnit'
+    | 'areaShown'
     | 'lengthUnit'
     | 'timeZone'
     | 'deskMinutesPerOrder'
@@ -48,6 +49,10 @@ export class Workshop {
 
   @Property({ type: 'text', columnType: 'text' })
   areaUnit: 'ft2' | 'dm2' | 'm2' = 'ft2';
+
+  /** How finely the area of a lot is said: the two habits of the trade. */
+  @Property({ type: 'text', columnType: 'text' })
+  areaShown: 'tenth' | 'quarter' = 'tenth';
 
   @Property({ type: 'text', columnType: 'text' })
   lengthUnit: 'mm' | 'in' = 'mm';

@@ -86,6 +86,7 @@ function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {
     name: workshop.name,
     currency: workshop.currency,
     areaUnit: workshop.areaUnit,
+    areaShown: workshop.areaShown,
     lengthUnit: workshop.lengthUnit,
     timeZone: workshop.timeZone,
     targetPerHour: moneyText(workshop.targetPerHour),

@@ -1,0 +1,37 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { KitPart } from './kit-part.entity.ts';
+
+/** The parts of each kit among these, by the kit's number; what is no kit is not in it. */
+export async function kitsAmong(
+  em: EntityManager,
+  ids: readonly number[],
+): Promise<Map<number, KitPart[]>> {
+  const parts = await em.find(KitPart, { kitId: { $in: [...ids] } }, { orderBy: { id: 'asc' } });
+  const kits = new Map<number, KitPart[]>();
+  for (const part of parts) kits.set(part.kitId, [...(kits.get(part.kitId) ?? []), part]);
+  return kits;
+}
+
+interface Counted {
+  hardwareId: number;
+  quantity: number;
+}
+
+/** Counts of hardware with every kit as its parts, each kind once: what is really taken from the shelf. */
+export async function throughKits(
+  em: EntityManager,
+  counted: readonly Counted[],
+): Promise<Counted[]> {
+  const kits = await kitsAmong(
+    em,
+    counted.map(({ hardwareId }) => hardwareId),
+  );
+  const sums = new Map<number, number>();
+  const add = (id: number, quantity: number) => sums.set(id, (sums.get(id) ?? 0) + quantity);
+  for (const { hardwareId, quantity } of counted) {
+    const parts = kits.get(hardwareId);
+    if (parts === undefined) add(hardwareId, quantity);
+    else for (const part of parts) add(part.hardwareId, part.quantity * quantity);
+  }
+  return [...sums].map(([hardwareId, quantity]) => ({ hardwareId, quantity }));
+}

@@ -1,0 +1,159 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { ft2, stockUp } from '../../testing/stockroom.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let shop: Awaited<ReturnType<typeof startTestShop>>;
+let things: Awaited<ReturnType<typeof stockUp>>;
+let second: number;
+
+beforeAll(async () => {
+  shop = await startTestShop();
+  things = await stockUp(shop);
+  const { body } = await owner().post('/api/suppliers').send({ name: 'Fennbridge Fittings' });
+  second = body.id;
+});
+afterAll(() => shop.close());
+
+const owner = () => shop.as('owner');
+const offer = (body: object) => owner().post('/api/supplier-offers').send(body);
+const breaks = [
+  { from: '100', price: '0.18' },
+  { from: '1000', price: '0.15' },
+];
+
+describe('offers of suppliers', () => {
+  it('are several for one thing, the first of them preferred', async () => {
+    const { supplierId, hardwareId } = things;
+    const first = await offer({
+      ...{ supplierId, hardwareId, breaks },
+      articleNumber: 'R-9',
+      minimum: '100',
+      multiple: '100',
+    }).expect(201);
+    expect(first.body).toMatchObject({
+      of: 'hardware',
+      unit: 'piece',
+      minimum: '100',
+      multiple: '100',
+      leadDays: null,
+      usualLeadDays: 10,
+      preferred: true,
+      breaks,
+    });
+    const other = { supplierId: second, hardwareId, leadDays: 2 };
+    await offer({ ...other, breaks: [{ from: '1', price: '0.2' }] }).expect(201);
+    const list = await owner().get(`/api/supplier-offers?hardwareId=${hardwareId}`).expect(200);
+    expect(
+      list.body.items.map((each: { preferred: boolean; usualLeadDays: number }) => [
+        each.preferred,
+        each.usualLeadDays,
+      ]),
+    ).toEqual([
+      [true, 10],
+      [false, 2],
+    ]);
+  });
+
+  it('keep an area of leather exactly, and its price per ft²', async () => {
+    const { supplierId, leatherId } = things;
+    const { body } = await offer({
+      ...{ supplierId, leatherId },
+      minimum: ft2(20),
+      breaks: [
+        { from: '0', price: '9.1' },
+        { from: ft2(100), price: '8.75' },
+      ],
+    }).expect(201);
+    expect(body).toMatchObject({
+      of: 'leather',
+      unit: 'mm2',
+      minimum: '1858060.8',
+      multiple: null,
+      breaks: [{ price: '9.1' }, { from: '9290304', price: '8.75' }],
+    });
+  });
+
+  it('show the maker who sells it, and no price', async () => {
+    const { hardwareId } = things;
+    const { body } = await shop
+      .as('maker')
+      .get(`/api/supplier-offers?hardwareId=${hardwareId}`)
+      .expect(200);
+    expect(body.items).toHaveLength(2);
+    expect(body.items[0]).not.toHaveProperty('breaks');
+    for (const role of ['maker', 'bookkeeper'] as const)
+      await shop
+        .as(role)
+        .post('/api/supplier-offers')
+        .send({ supplierId: second, hardwareId, breaks })
+        .expect(403);
+  });
+
+  it('change only the thing’s own price when that is pressed', async () => {
+    const { hardwareId } = things;
+    const read = async () => (await owner().get(`/api/hardware/${hardwareId}`).expect(200)).body;
+    const { body } = await owner().get(`/api/supplier-offers?hardwareId=${hardwareId}`);
+    const other = body.items[1];
+    expect(await read()).toMatchObject({ unitPrice: '0.17', supplierId: null });
+    await owner().post(`/api/supplier-offers/${other.id}/adoptions`).expect(200);
+    expect(await read()).toMatchObject({ unitPrice: '0.20', supplierId: second, packSize: 100 });
+    const after = await owner().get(`/api/supplier-offers?hardwareId=${hardwareId}`);
+    expect(
+      after.body.items.map((each: { id: number; preferred: boolean }) => [each.id, each.preferred]),
+    ).toEqual([
+      [other.id, true],
+      [body.items[0].id, false],
+    ]);
+  });
+
+  it('change in the version that was read, and go off the list', async () => {
+    const { hardwareId } = things;
+    const { body } = await owner().get(`/api/supplier-offers?hardwareId=${hardwareId}`);
+    const [{ id, version }] = body.items;
+    const change = (read: number) =>
+      owner().patch(`/api/supplier-offers/${id}`).set('If-Match', `"${read}"`);
+    const changed = await change(version).send({ minimum: '50', leadDays: null }).expect(200);
+    expect(changed.body).toMatchObject({ minimum: '50', leadDays: null, breaks: [{ from: '1' }] });
+    await change(version).send({ leadDays: 4 }).expect(412);
+    await change(changed.body.version).send({ minimum: '55', multiple: '10' }).expect(422);
+    await owner().delete(`/api/supplier-offers/${id}`).expect(200);
+    await owner().delete(`/api/supplier-offers/${id}`).expect(404);
+  });
+
+  const line = (from: string, price: string) => ({ from, price });
+  it.each([
+    ['breaks out of order', { breaks: [line('100', '2'), line('50', '1')] }, 'breaks.1.from'],
+    ['twice the same', { breaks: [line('1', '2'), line('1', '1')] }, 'breaks.1.from'],
+    ['a rising price', { breaks: [line('1', '2'), line('50', '2.1')] }, 'breaks.1.price'],
+    [
+      'a minimum off the pack',
+      { breaks: [line('1', '2')], minimum: '150', multiple: '100' },
+      'minimum',
+    ],
+    [
+      'a first price above the minimum',
+      { breaks: [line('100', '2')], minimum: '50' },
+      'breaks.0.from',
+    ],
+    ['no price at all', { breaks: [] }, 'breaks'],
+    ['half a rivet', { breaks: [line('1', '2'), line('5.5', '1')] }, 'breaks.1.from'],
+    ['a price below zero', { breaks: [line('1', '-2')] }, 'breaks.0.price'],
+  ])('refuse %s, naming the line', async (_what, wrong, field) => {
+    const { hardwareId } = things;
+    const { body } = await owner()
+      .post('/api/suppliers')
+      .send({ name: `For ${_what}` });
+    const refused = await offer({ supplierId: body.id, hardwareId, ...wrong }).expect(422);
+    expect(refused.body.errors).toMatchObject([{ field }]);
+    expect(refused.body.errors[0].message).toMatch(/^[A-Z].*\.$/);
+  });
+
+  it('say who is on the list already, and what is no thing', async () => {
+    const { supplierId, hardwareId, leatherId } = things;
+    const again = await offer({ supplierId, hardwareId, minimum: '100', breaks }).expect(422);
+    expect(again.body.errors[0].message).toContain('is on the list already');
+    await offer({ supplierId, hardwareId, leatherId, breaks }).expect(422);
+    await offer({ supplierId, breaks }).expect(422);
+    await offer({ supplierId, hardwareId: 999, breaks }).expect(422);
+  });
+});
