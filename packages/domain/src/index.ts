@@ -107,6 +107,8 @@ export * from './stock/available-to-promise.ts';
 export * from './stock/supplier-offer.ts';
 export * from './stock/best-buy.ts';
 
+export * from './hardware/kit-prices.ts';
+
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';
 export * from './promise/bench-plan.ts';

@@ -150,7 +150,10 @@ async function explainHardware(
   const moved = await em.find(StockMovement, { jobId: job.id, hardwareId: { $ne: null } });
   return hardware.flatMap(({ hardwareId, quantity }, at) => {
     const own = moved.filter((each) => each.hardwareId === hardwareId);
-    const kind = input.hardware[at];
+    // A quote of before there were options names no numbers; its lines stand in the same order.
+    const kind =
+      input.hardware.find((line) => line.hardwareId === hardwareId) ??
+      (input.hardware[at]?.hardwareId === undefined ? input.hardware[at] : undefined);
     if (own.length === 0 || kind === undefined) return [];
     const parts = boughtVariances(
       {

@@ -1,6 +1,7 @@
 import { benchMinutes, priceRun, ticketSteps, toAtMost, type RunInput } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
+import { throughKits } from '../modules/hardware/kits.ts';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 import { definitionOf } from '../modules/patterns/pattern-versions.ts';
 import { numbersOfQuote, rungsOf } from '../modules/quotes/quote-numbers.ts';
@@ -63,11 +64,15 @@ export async function planRun(
       input,
     },
     patternId: version.patternId,
-    hardware: input.hardware.map((line, at) => ({
-      // Quotes of before there were options have the pattern's hardware, line by line.
-      hardwareId: line.hardwareId ?? (hardware[at]?.hardwareId as number),
-      quantity: run.hardwareCounts[at] ?? 0,
-    })),
+    // What a quote of before counts as one thing can be a kit by now.
+    hardware: await throughKits(
+      em,
+      input.hardware.map((line, at) => ({
+        // Quotes of before there were options have the pattern's hardware, line by line.
+        hardwareId: line.hardwareId ?? (hardware[at]?.hardwareId as number),
+        quantity: run.hardwareCounts[at] ?? 0,
+      })),
+    ),
     plannedMinutes: steps.reduce((sum, step) => sum.plus(step.plannedMinutes), new Decimal(0)),
   };
 }

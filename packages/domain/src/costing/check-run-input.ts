@@ -62,7 +62,7 @@ function checkHardware(lines: readonly RunHardware[], field: string, { work }: R
   const steps = work.kind === 'steps' ? work.steps.length : 1;
   lines.forEach(({ unitPrice, perPiece, fromStep, lossPercent }, at) => {
     checkMoney(unitPrice, `${field}.${at}.unitPrice`, 4);
-    readWhole(perPiece, `${field}.${at}.perPiece`, 1, 10_000);
+    readWhole(perPiece, `${field}.${at}.perPiece`, 1, 1_000_000);
     if (fromStep !== null && fromStep !== undefined) {
       readWhole(fromStep, `${field}.${at}.fromStep`, 0, steps - 1);
     }

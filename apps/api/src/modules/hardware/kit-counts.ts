@@ -1,4 +1,4 @@
-import { Decimal } from 'decimal.js';
+import { priceText } from '../../http/decimal-text.ts';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 
@@ -8,7 +8,7 @@ export interface PartStock {
   hardwareId: number;
   name: string;
   quantity: number;
-  unitPrice: Decimal;
+  unitPrice: string;
   onHand: number;
   free: number;
   onOrder: number;
@@ -41,7 +41,7 @@ export async function partStock(em: EntityManager, ids: readonly number[]): Prom
     hardwareId: row.hardware_id,
     name: row.name,
     quantity: row.quantity,
-    unitPrice: unscaled(row.unit_price, 4),
+    unitPrice: priceText(unscaled(row.unit_price, 4)),
     onHand: row.on_hand,
     free: row.free,
     onOrder: row.on_order,
@@ -55,9 +55,4 @@ export function kitCounts(parts: readonly PartStock[]) {
   const [onHand, free] = [fewest((part) => part.onHand), fewest((part) => part.free)];
   const onOrder = fewest((part) => part.free + part.onOrder) - free;
   return { onHand, free, reserved: onHand - free, onOrder };
-}
-
-/** Of one kit, at today's price of its parts. */
-export function kitPrice(parts: readonly { quantity: number; unitPrice: Decimal }[]): Decimal {
-  return Decimal.sum(0, ...parts.map(({ quantity, unitPrice }) => unitPrice.times(quantity)));
 }

@@ -1,10 +1,12 @@
+import { kitPrice } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { Hardware as HardwareReply } from '@hidewright/contract';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText, priceText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
-import { kitCounts, kitPrice } from './kit-counts.ts';
+import { kitCounts } from './kit-counts.ts';
 import { readRelated, type Related } from './related-hardware.ts';
 
 interface Asked {
@@ -88,7 +90,8 @@ export async function readOneHardware(em: EntityManager, id: number): Promise<Ha
 function toReply(row: Row, related: Related): HardwareReply {
   const parts = related.partsOf(row.id);
   const isKit = parts.length > 0;
-  const price = isKit && row.price_from_parts === 1 ? kitPrice(parts) : unscaled(row.unit_price, 4);
+  const own = unscaled(row.unit_price, 4);
+  const price = isKit && row.price_from_parts === 1 ? new Decimal(kitPrice(parts)) : own;
   return {
     id: row.id,
     name: row.name,

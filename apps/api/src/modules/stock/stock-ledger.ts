@@ -3,6 +3,7 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { describeItem } from './described-item.ts';
+import { refuseKit } from './refuse-kit.ts';
 import { Reservation } from './reservation.entity.ts';
 import { StockBalance } from './stock-balance.entity.ts';
 import { itemOf, keysOf, type StockItem } from './stock-item.ts';
@@ -217,6 +218,7 @@ async function move(work: Work, item: StockItem, movement: Movement): Promise<St
 }
 
 async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalance> {
+  await refuseKit(em, item);
   const found = await em.findOne(StockBalance, keysOf(item));
   return found ?? em.create(StockBalance, { ...keysOf(item), onHand: 0, reserved: 0 });
 }
