@@ -25,6 +25,12 @@ const hardwareLine = z.strictObject({
   perPiece,
   /** Needed for every piece that reaches this step, counted from 0; else for the pieces ordered. */
   fromStep: z.int('Choose a step.').min(0).max(39).nullish(),
+  /** Layers of leather that it is set through; two where nobody said. */
+  layers: z
+    .int('Enter whole layers.')
+    .min(1, 'Enter 1 layer or more.')
+    .max(20, 'Enter at most 20 layers.')
+    .nullish(),
   /** Of the hardware itself that is spoiled. */
   lossPercent: percent
     .refine((text) => Number(text) <= 99, 'Enter losses from 0 to 99 %.')
@@ -114,7 +120,15 @@ export const pattern = z
     versionNumber: z.int().positive(),
     definition: patternDefinition,
     leatherName: z.string(),
-    hardware: z.array(z.object({ hardwareId: id, name: z.string(), perPiece: z.int() })),
+    hardware: z.array(
+      z.object({
+        hardwareId: id,
+        name: z.string(),
+        perPiece: z.int(),
+        /** What speaks against setting it through this leather, in sentences. */
+        remarks: z.array(z.string()),
+      }),
+    ),
     /** "round, 95 mm" or "21 from a panel". */
     description: z.string(),
     /** SVG path data in mm; none where the pattern has no drawing. */

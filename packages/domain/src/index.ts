@@ -108,6 +108,8 @@ export * from './stock/supplier-offer.ts';
 export * from './stock/best-buy.ts';
 
 export * from './hardware/kit-prices.ts';
+export * from './hardware/count-by-weight.ts';
+export * from './hardware/post-fit.ts';
 
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';

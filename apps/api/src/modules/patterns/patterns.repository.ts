@@ -6,11 +6,11 @@ import type {
 } from '@hidewright/contract';
 import type { Layout } from '@hidewright/domain';
 import type { Work } from '../../work.ts';
-import { Hardware } from '../hardware/hardware.entity.ts';
 import { StoredLayout } from '../layouts/layout.entity.ts';
 import { layoutHash, pathOfDefinition } from '../layouts/stored-layouts.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { describeDefinition } from './describe-definition.ts';
+import { describeHardware } from './describe-hardware.ts';
 import { PatternVersion } from './pattern-version.entity.ts';
 import { definitionOf } from './pattern-versions.ts';
 import { Pattern } from './pattern.entity.ts';
@@ -86,10 +86,6 @@ export async function describePattern(
 ): Promise<PatternReply> {
   const definition = definitionOf(version);
   const leather = await em.findOne(Leather, definition.leatherId);
-  const hardware = await em.find(Hardware, {
-    id: { $in: definition.hardware.map((each) => each.hardwareId) },
-  });
-  const nameOf = (id: number) => hardware.find((each) => each.id === id)?.name ?? '';
   return {
     id: pattern.id,
     name: pattern.name,
@@ -97,7 +93,7 @@ export async function describePattern(
     versionNumber: version.number,
     definition,
     leatherName: leather?.name ?? '',
-    hardware: definition.hardware.map((each) => ({ ...each, name: nameOf(each.hardwareId) })),
+    hardware: await describeHardware(em, definition, leather),
     description: describeDefinition(definition),
     outlinePath: pathOfDefinition(definition),
     layout,

@@ -1,0 +1,98 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { Pattern } from '@hidewright/contract';
+import { agreedQuote, readyForTheBench, takenOn, ticketOf } from '../testing/bench-shop.ts';
+import { startTestShop } from '../testing/test-shop.ts';
+
+let shop: Awaited<ReturnType<typeof startTestShop>>;
+let ready: Awaited<ReturnType<typeof readyForTheBench>>;
+let cap: number;
+let post: number;
+let kit: number;
+
+beforeAll(async () => {
+  shop = await startTestShop();
+  ready = await readyForTheBench(shop);
+  cap = await add({ name: 'Cap 9 mm', unitPrice: '0.06' });
+  post = await add({
+    name: 'Post 8 mm',
+    unitPrice: '0.05',
+    postLengthMm: '8',
+    stackMinMm: '5',
+    stackMaxMm: '6.5',
+  });
+  kit = await add({
+    name: 'Rivet in two',
+    unitPrice: '0',
+    priceFromParts: true,
+    settingDie: 'SD-9',
+    settingDieHere: false,
+    parts: [
+      { hardwareId: cap, quantity: 1 },
+      { hardwareId: post, quantity: 1 },
+    ],
+  });
+  const hardware = [
+    { hardwareId: cap, quantity: 150 },
+    { hardwareId: post, quantity: 120 },
+  ];
+  await owner().post('/api/receipts').send({ hardware }).expect(201);
+});
+afterAll(() => shop.close());
+
+const owner = () => shop.as('owner');
+const add = async (body: object): Promise<number> =>
+  (await owner().post('/api/hardware').send(body).expect(201)).body.id;
+const reservedOf = async (id: number): Promise<number> =>
+  (await owner().get(`/api/hardware/${id}`).expect(200)).body.reserved;
+
+async function changePattern(change: (before: Pattern) => object): Promise<Pattern> {
+  const { body } = await owner().get(`/api/patterns/${ready.patternId}`).expect(200);
+  const definition = { ...body.definition, ...change(body) };
+  const changed = await owner()
+    .patch(`/api/patterns/${ready.patternId}`)
+    .set('If-Match', `"${body.version}"`)
+    .send({ definition })
+    .expect(200);
+  return changed.body;
+}
+
+describe('a kit on a pattern', () => {
+  it('is costed, checked, held and taken as its parts', async () => {
+    await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 2 }] }));
+    const quote = await agreedQuote(ready, 50);
+    const check = await owner().get(`/api/quotes/${quote.id}/check?quantity=50`).expect(200);
+    const names = check.body.answers.map((answer: { name: string }) => answer.name);
+    expect(names).toEqual(expect.arrayContaining(['Cap 9 mm', 'Post 8 mm']));
+    expect(names).not.toContain('Rivet in two');
+    const ticket = await ticketOf(ready, await takenOn(ready, 50));
+    expect(ticket.hardware).toMatchObject([
+      { name: 'Cap 9 mm', needed: 100, held: 100 },
+      { name: 'Post 8 mm', needed: 100, held: 100 },
+    ]);
+    expect([await reservedOf(cap), await reservedOf(post)]).toEqual([100, 100]);
+    const taking = { hardwareId: post, quantity: 100 };
+    await owner().post(`/api/jobs/${ticket.id}/takings`).send(taking).expect(201);
+    expect([await reservedOf(cap), await reservedOf(post)]).toEqual([100, 0]);
+  });
+
+  it('says what speaks against setting it through the folded leather', async () => {
+    const unsaid = await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1 }] }));
+    const die = 'It is set with the die SD-9, which is not in the shop.';
+    expect(unsaid.hardware).toMatchObject([{ remarks: [die] }]);
+    const { body: leather } = await owner().get(`/api/leathers/${ready.leatherId}`).expect(200);
+    await owner()
+      .patch(`/api/leathers/${ready.leatherId}`)
+      .set('If-Match', `"${leather.version}"`)
+      .send({ weightLowOz: '5', weightHighOz: '6' })
+      .expect(200);
+    const { body } = await owner().get(`/api/patterns/${ready.patternId}`).expect(200);
+    expect(body.hardware[0].remarks).toEqual([
+      die,
+      'Post 8 mm: The post is 8 mm and holds 5 to 6.5 mm. Two layers of 5 to 6 oz are 4 to 4.8 mm: up to 1 mm too thin. Take a shorter one, or add a layer.',
+    ]);
+    const three = await changePattern(() => ({
+      hardware: [{ hardwareId: kit, perPiece: 1, layers: 3 }],
+    }));
+    expect(three.hardware[0]?.remarks[1]).toContain('Three layers');
+  });
+});

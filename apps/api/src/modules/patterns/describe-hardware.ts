@@ -1,0 +1,59 @@
+import type { Pattern as PatternReply, PatternDefinition } from '@hidewright/contract';
+import { settingFaults } from '@hidewright/domain';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { Hardware } from '../hardware/hardware.entity.ts';
+import { kitsAmong } from '../hardware/kits.ts';
+import type { Leather } from '../leathers/leather.entity.ts';
+
+/** The layers that hardware is set through where nobody said: one piece of leather on another. */
+const usualLayers = 2;
+
+/** The hardware of a pattern by name, with what speaks against setting it through the pattern's leather. */
+export async function describeHardware(
+  em: EntityManager,
+  { hardware: lines }: PatternDefinition,
+  leather: Leather | null,
+): Promise<PatternReply['hardware']> {
+  const ids = lines.map(({ hardwareId }) => hardwareId);
+  const kits = await kitsAmong(em, ids);
+  const partIds = [...kits.values()].flat().map(({ hardwareId }) => hardwareId);
+  const found = await em.find(Hardware, { id: { $in: [...ids, ...partIds] } });
+  const byId = new Map(found.map((each) => [each.id, each]));
+  return lines.map(({ hardwareId, perPiece, layers }) => {
+    const kind = byId.get(hardwareId);
+    const parts = (kits.get(hardwareId) ?? []).flatMap((part) => byId.get(part.hardwareId) ?? []);
+    return {
+      hardwareId,
+      perPiece,
+      name: kind?.name ?? '',
+      remarks: [
+        ...(kind === undefined ? [] : remarksOn(kind, leather, layers)),
+        ...parts.flatMap((part) =>
+          remarksOn(part, leather, layers).map((remark) => `${part.name}: ${remark}`),
+        ),
+      ],
+    };
+  });
+}
+
+function remarksOn(
+  kind: Hardware,
+  leather: Leather | null,
+  layers: number | null | undefined,
+): string[] {
+  const { settingDie, settingDieHere } = kind;
+  return settingFaults(
+    {
+      postLengthMm: kind.postLengthMm?.toString() ?? null,
+      stackMinMm: kind.stackMinMm?.toString() ?? null,
+      stackMaxMm: kind.stackMaxMm?.toString() ?? null,
+      settingDie,
+      settingDieHere,
+    },
+    {
+      layers: layers ?? usualLayers,
+      weightLowOz: leather?.weightLowOz?.toString() ?? null,
+      weightHighOz: leather?.weightHighOz?.toString() ?? null,
+    },
+  );
+}

@@ -1,0 +1,98 @@
+import type { Decimal } from 'decimal.js';
+import {
+  type DecimalText,
+  Exact,
+  readDecimal,
+  readWhole,
+  toAtMost,
+} from '../numbers/decimal-text.ts';
+import { convert } from '../units/convert.ts';
+
+/** Hardware that is set through leather, as far as it is known. Lengths in mm, 0 or more. */
+export interface Setting {
+  postLengthMm: DecimalText | null;
+  /** the folded stack that it holds */
+  stackMinMm: DecimalText | null;
+  stackMaxMm: DecimalText | null;
+  /** the die that sets it; empty where none is needed */
+  settingDie: string;
+  settingDieHere: boolean;
+}
+
+/** What it is set through. */
+export interface Stack {
+  /** layers of leather on top of each other, 1 to 20 */
+  layers: number;
+  /** weight of the leather, null where nobody said */
+  weightLowOz: DecimalText | null;
+  weightHighOz: DecimalText | null;
+}
+
+const numbers = ['No layer', 'One layer', 'Two layers', 'Three layers', 'Four layers'];
+
+/**
+ * What is wrong with setting a hardware through a folded stack, in sentences: the stack is layers × weight, at 1 oz =
+ * 1/64 in (ASTM D1814-70, 2000, §1.2). Nothing where it fits, or where too little is known to say.
+ * @throws InvalidInput
+ */
+export function settingFaults(setting: Setting, stack: Stack): string[] {
+  return [...stackFaults(setting, stack), ...dieFaults(setting)];
+}
+
+function stackFaults(setting: Setting, stack: Stack): string[] {
+  const { layers, weightLowOz, weightHighOz } = stack;
+  readWhole(layers, 'layers', 1, 20);
+  if (weightLowOz === null) return [];
+  const thick = (oz: DecimalText, field: string) =>
+    convert(readDecimal(oz, field, { min: 0 }), 'oz', 'mm').times(layers);
+  const low = thick(weightLowOz, 'weightLowOz');
+  const high = thick(weightHighOz ?? weightLowOz, 'weightHighOz');
+  const verdict = verdictOn(setting, low, high);
+  if (verdict === null) return [];
+  const weight = rangeText(new Exact(weightLowOz), new Exact(weightHighOz ?? weightLowOz), 3);
+  const are = layers === 1 ? 'is' : 'are';
+  const stacked = `${numbers[layers] ?? `${layers} layers`} of ${weight} oz ${are} ${rangeText(low, high, 1)} mm`;
+  return [`${holds(setting)}${stacked}: ${verdict}`];
+}
+
+/** What the hardware is made for, before what it is to be set through. */
+function holds({ postLengthMm, stackMinMm, stackMaxMm }: Setting): string {
+  const post = postLengthMm === null ? '' : `The post is ${postLengthMm} mm`;
+  if (stackMaxMm === null) return `${post}. `;
+  const range =
+    stackMinMm === null
+      ? `up to ${stackMaxMm} mm`
+      : `${rangeText(new Exact(stackMinMm), new Exact(stackMaxMm), 3)} mm`;
+  return `${post === '' ? 'It' : `${post} and`} holds ${range}. `;
+}
+
+function verdictOn(
+  { postLengthMm, stackMinMm, stackMaxMm }: Setting,
+  low: Decimal,
+  high: Decimal,
+): string | null {
+  // Without a stack that it is known to hold, only a post that does not even come through is certainly wrong.
+  const most = stackMaxMm ?? postLengthMm;
+  if (most !== null && high.gt(most)) {
+    const by = toAtMost(high.minus(most), 1);
+    return stackMaxMm === null
+      ? 'it does not come through. Take a longer one.'
+      : `up to ${by} mm too thick. Take a longer one, or fewer layers.`;
+  }
+  if (stackMinMm !== null && low.lt(stackMinMm)) {
+    const by = toAtMost(new Exact(stackMinMm).minus(low), 1);
+    return `up to ${by} mm too thin. Take a shorter one, or add a layer.`;
+  }
+  return null;
+}
+
+function dieFaults({ settingDie, settingDieHere }: Setting): string[] {
+  if (settingDie === '' || settingDieHere) return [];
+  return [`It is set with the die ${settingDie}, which is not in the shop.`];
+}
+
+/** 4 to 4.8, or one figure where both are the same. */
+function rangeText(low: Decimal, high: Decimal, places: number): string {
+  const [from, to] = [toAtMost(low, places), toAtMost(high, places)];
+  return from === to ? from : `${from} to ${to}`;
+}
