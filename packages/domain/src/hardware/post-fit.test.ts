@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { settingFaults, type Setting, type Stack } from './post-fit.ts';
+import { kitSettingFaults, settingFaults, type Setting, type Stack } from './post-fit.ts';
 
 const rivet: Setting = {
   postLengthMm: '8',
@@ -43,6 +43,13 @@ describe('a post against the folded stack', () => {
       'It is set with the die SD-9, which is not in the shop.',
     ]);
     expect(settingFaults({ ...setting, settingDieHere: true }, twoOf5to6)).toEqual([]);
+  });
+
+  it('is looked at in a kit part by part, through two layers where nobody said', () => {
+    const kit = { ...rivet, postLengthMm: null, stackMinMm: null, stackMaxMm: null };
+    const part = { ...rivet, name: 'Post 8 mm' };
+    const faults = kitSettingFaults(kit, [part], { ...twoOf5to6, layers: null });
+    expect(faults).toEqual([`Post 8 mm: ${settingFaults(rivet, twoOf5to6)[0]}`]);
   });
 
   it('is found sound exactly where the whole stack lies within what it holds', () => {

@@ -21,13 +21,14 @@ export interface Setting {
 
 /** What it is set through. */
 export interface Stack {
-  /** layers of leather on top of each other, 1 to 20 */
-  layers: number;
+  /** layers of leather on top of each other, 1 to 20; null where nobody said: one on another, two */
+  layers: number | null;
   /** weight of the leather, null where nobody said */
   weightLowOz: DecimalText | null;
   weightHighOz: DecimalText | null;
 }
 
+const usualLayers = 2;
 const numbers = ['No layer', 'One layer', 'Two layers', 'Three layers', 'Four layers'];
 
 /**
@@ -39,8 +40,21 @@ export function settingFaults(setting: Setting, stack: Stack): string[] {
   return [...stackFaults(setting, stack), ...dieFaults(setting)];
 }
 
+/** The same of a kit: its own faults and those of each part, which is named. @throws InvalidInput */
+export function kitSettingFaults(
+  kit: Setting,
+  parts: readonly (Setting & { name: string })[],
+  stack: Stack,
+): string[] {
+  const ofParts = parts.flatMap((part) =>
+    settingFaults(part, stack).map((fault) => `${part.name}: ${fault}`),
+  );
+  return [...settingFaults(kit, stack), ...ofParts];
+}
+
 function stackFaults(setting: Setting, stack: Stack): string[] {
-  const { layers, weightLowOz, weightHighOz } = stack;
+  const { weightLowOz, weightHighOz } = stack;
+  const layers = stack.layers ?? usualLayers;
   readWhole(layers, 'layers', 1, 20);
   if (weightLowOz === null) return [];
   const thick = (oz: DecimalText, field: string) =>

@@ -1,12 +1,9 @@
 import type { Pattern as PatternReply, PatternDefinition } from '@hidewright/contract';
-import { settingFaults } from '@hidewright/domain';
+import { kitSettingFaults } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { Hardware } from '../hardware/hardware.entity.ts';
 import { kitsAmong } from '../hardware/kits.ts';
 import type { Leather } from '../leathers/leather.entity.ts';
-
-/** The layers that hardware is set through where nobody said: one piece of leather on another. */
-const usualLayers = 2;
 
 /** The hardware of a pattern by name, with what speaks against setting it through the pattern's leather. */
 export async function describeHardware(
@@ -22,38 +19,21 @@ export async function describeHardware(
   return lines.map(({ hardwareId, perPiece, layers }) => {
     const kind = byId.get(hardwareId);
     const parts = (kits.get(hardwareId) ?? []).flatMap((part) => byId.get(part.hardwareId) ?? []);
-    return {
-      hardwareId,
-      perPiece,
-      name: kind?.name ?? '',
-      remarks: [
-        ...(kind === undefined ? [] : remarksOn(kind, leather, layers)),
-        ...parts.flatMap((part) =>
-          remarksOn(part, leather, layers).map((remark) => `${part.name}: ${remark}`),
-        ),
-      ],
-    };
+    const stack = { layers: layers ?? null, ...weightOf(leather) };
+    const remarks =
+      kind === undefined ? [] : kitSettingFaults(settingOf(kind), parts.map(settingOf), stack);
+    return { hardwareId, perPiece, name: kind?.name ?? '', remarks };
   });
 }
 
-function remarksOn(
-  kind: Hardware,
-  leather: Leather | null,
-  layers: number | null | undefined,
-): string[] {
-  const { settingDie, settingDieHere } = kind;
-  return settingFaults(
-    {
-      postLengthMm: kind.postLengthMm?.toString() ?? null,
-      stackMinMm: kind.stackMinMm?.toString() ?? null,
-      stackMaxMm: kind.stackMaxMm?.toString() ?? null,
-      settingDie,
-      settingDieHere,
-    },
-    {
-      layers: layers ?? usualLayers,
-      weightLowOz: leather?.weightLowOz?.toString() ?? null,
-      weightHighOz: leather?.weightHighOz?.toString() ?? null,
-    },
-  );
-}
+const weightOf = (leather: Leather | null) => ({
+  weightLowOz: leather?.weightLowOz?.toString() ?? null,
+  weightHighOz: leather?.weightHighOz?.toString() ?? null,
+});
+
+const settingOf = ({ name, settingDie, settingDieHere, ...kind }: Hardware) => ({
+  ...{ name, settingDie, settingDieHere },
+  postLengthMm: kind.postLengthMm?.toString() ?? null,
+  stackMinMm: kind.stackMinMm?.toString() ?? null,
+  stackMaxMm: kind.stackMaxMm?.toString() ?? null,
+});

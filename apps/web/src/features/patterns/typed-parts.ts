@@ -8,7 +8,11 @@ export function hardwareBody(line: Typed, steps: number): Typed {
   const gone = typeof fromStep === 'number' && fromStep >= steps;
   return {
     ...pick(line, ['hardwareId', 'perPiece']),
-    ...filled({ fromStep: gone ? undefined : fromStep, lossPercent: line['lossPercent'] }),
+    ...filled({
+      fromStep: gone ? undefined : fromStep,
+      lossPercent: line['lossPercent'],
+      layers: line['layers'],
+    }),
   };
 }
 

@@ -17,13 +17,11 @@ export function leatherGoods(leathers: readonly Leather[]): Goods[] {
   return inUse(leathers).map(({ id, name, pricePerFt2 }) => ({ id, name, price: pricePerFt2 }));
 }
 
+/** What is bought: a kit is bought by its parts, and what the customer brings is not bought at all. */
 export function hardwareGoods(hardware: readonly Hardware[]): Goods[] {
-  return inUse(hardware).map(({ id, name, unitPrice, packSize }) => ({
-    id,
-    name,
-    price: unitPrice,
-    packSize,
-  }));
+  return inUse(hardware)
+    .filter(({ parts, fromCustomer }) => parts.length === 0 && !fromCustomer)
+    .map(({ id, name, unitPrice, packSize }) => ({ id, name, price: unitPrice, packSize }));
 }
 
 function inUse<Thing extends Named>(things: readonly Thing[]): Thing[] {

@@ -8,9 +8,15 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { ChangeHardwareForm } from '../../../features/hardware/components/change-hardware-form.tsx';
 import { HardwareFacts } from '../../../features/hardware/components/hardware-facts.tsx';
+import {
+  hasRelated,
+  RelatedHardware,
+} from '../../../features/hardware/components/related-hardware.tsx';
 import { hardwareQuery } from '../../../features/hardware/hardware.queries.ts';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
 import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
+import { OffersCard } from '../../../features/supplier-offers/components/offers-card.tsx';
+import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { choicesOf } from './choices.ts';
@@ -23,6 +29,7 @@ export async function loader({ params }: LoaderFunctionArgs) {
   const hardware = await queryClient.ensureQueryData(hardwareQuery(id));
   await Promise.all([
     queryClient.ensureQueryData(suppliersQuery()),
+    queryClient.ensureQueryData(supplierOffersQuery({ hardwareId: id })),
     queryClient.ensureInfiniteQueryData(movementsQuery({ hardwareId: id })),
     queryClient.ensureQueryData(heldQuery({ hardwareId: id })),
   ]);
@@ -35,12 +42,13 @@ export function Component() {
   const { data: hardware } = useSuspenseQuery(hardwareQuery(id));
   const { data: suppliers } = useSuspenseQuery(suppliersQuery());
   const item = { hardwareId: id };
+  const isKit = hardware.parts.length > 0;
   return (
     <>
       <PageHeader
         title={hardware.name}
         subtitle={hardware.short ? <StateMark state="short" /> : hardware.kind}
-        action={handlesStock && <Actions id={id} isOwner={isOwner} />}
+        action={handlesStock && !isKit && <Actions hardware={hardware} isOwner={isOwner} />}
       />
       <ItemLayout
         facts={
@@ -48,11 +56,30 @@ export function Component() {
             <HardwareFacts hardware={hardware} />
           </Card>
         }
-        aside={<HeldAndAdjust item={item} handlesStock={handlesStock} />}
+        aside={
+          <>
+            {hasRelated(hardware) && (
+              <Card title={isKit ? 'A kit' : 'Together with'}>
+                <RelatedHardware hardware={hardware} />
+              </Card>
+            )}
+            {!isKit && <HeldAndAdjust item={item} handlesStock={handlesStock} />}
+          </>
+        }
       >
-        <Card title="Movements">
-          <MovementsTable item={item} />
-        </Card>
+        {!isKit && !hardware.fromCustomer && (
+          <OffersCard
+            thing={item}
+            ownPrice={hardware.unitPrice}
+            suppliers={choicesOf(suppliers.items)}
+            isOwner={isOwner}
+          />
+        )}
+        {!isKit && (
+          <Card title="Movements">
+            <MovementsTable item={item} />
+          </Card>
+        )}
         {isOwner && (
           <Card title="Change it">
             <ChangeHardwareForm
@@ -67,13 +94,14 @@ export function Component() {
   );
 }
 
-function Actions({ id, isOwner }: { id: number; isOwner: boolean }) {
+function Actions({ hardware, isOwner }: { hardware: Hardware; isOwner: boolean }) {
+  const { id, fromCustomer } = hardware;
   return (
     <>
       <LinkButton to={`/stockroom/receive?hardware=${id}`} tone={isOwner ? 'secondary' : 'primary'}>
         Receive
       </LinkButton>
-      {isOwner && (
+      {isOwner && !fromCustomer && (
         <LinkButton to={`/stockroom/purchase-orders/new?hardware=${id}`} tone="primary">
           Order it
         </LinkButton>

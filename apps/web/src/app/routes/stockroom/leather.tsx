@@ -12,9 +12,12 @@ import { leatherDetail } from '../../../features/leathers/leather-words.ts';
 import { leatherQuery } from '../../../features/leathers/leathers.queries.ts';
 import { LotsTable } from '../../../features/lots/components/lots-table.tsx';
 import { lotsQuery } from '../../../features/lots/lots.queries.ts';
+import { OffersCard } from '../../../features/supplier-offers/components/offers-card.tsx';
+import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
-import { areaText, unitPriceText } from '../../../lib/formatting.ts';
+import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
+import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { choicesOf } from './choices.ts';
 import { useRole } from './use-role.ts';
@@ -24,6 +27,7 @@ export async function loader({ params }: LoaderFunctionArgs) {
   const [leather] = await Promise.all([
     queryClient.ensureQueryData(leatherQuery(id)),
     queryClient.ensureQueryData(suppliersQuery()),
+    queryClient.ensureQueryData(supplierOffersQuery({ leatherId: id })),
     queryClient.ensureInfiniteQueryData(lotsQuery({ leatherId: id, onRack: 'yes' })),
   ]);
   return leather;
@@ -73,6 +77,12 @@ export function Component() {
             }
           />
         </Card>
+        <OffersCard
+          thing={{ leatherId: id }}
+          ownPrice={leather.pricePerFt2}
+          suppliers={choicesOf(suppliers.items)}
+          isOwner={isOwner}
+        />
         {isOwner && (
           <Card title="Change it">
             <ChangeLeatherForm key={id} leather={leather} suppliers={choicesOf(suppliers.items)} />
@@ -84,18 +94,22 @@ export function Component() {
 }
 
 function Facts({ leather }: { leather: Leather }) {
-  const { areaUnit, currency } = useWorkshop();
-  const { pricePerFt2 } = leather;
+  const workshop = useWorkshop();
+  const { areaUnit, currency } = workshop;
+  const { pricePerFt2, supplierName } = leather;
+  const price = pricePerFt2 !== undefined && {
+    word: `Price, ${currency} per ${areaUnits[areaUnit].sign}`,
+    figure: areaPriceText(pricePerFt2, areaUnit),
+    note: supplierName ?? undefined,
+  };
   return (
     <KeyFigures
       large
       figures={[
-        { word: 'On hand', figure: areaText(leather.onHandAreaMm2, areaUnit) },
-        { word: 'Free', figure: areaText(leather.freeAreaMm2, areaUnit) },
-        { word: 'On order', figure: areaText(leather.onOrderAreaMm2, areaUnit) },
-        ...(pricePerFt2 === undefined
-          ? []
-          : [{ word: `Price, ${currency} per ft²`, figure: unitPriceText(pricePerFt2) }]),
+        { word: 'On hand', figure: rackAreaText(leather.onHandAreaMm2, workshop) },
+        { word: 'Free', figure: rackAreaText(leather.freeAreaMm2, workshop) },
+        { word: 'On order', figure: rackAreaText(leather.onOrderAreaMm2, workshop) },
+        ...(price === false ? [] : [price]),
       ]}
     />
   );

@@ -11,6 +11,19 @@ const blank = {
   packSize: 1,
   reorderAt: 0,
   supplierId: null,
+  unit: 'piece' as const,
+  metal: '',
+  colour: '',
+  bin: '',
+  fromCustomer: false,
+  priceFromParts: false,
+  parts: [],
+  standIns: [],
+  postLengthMm: null,
+  stackMinMm: null,
+  stackMaxMm: null,
+  settingDie: '',
+  settingDieHere: true,
 };
 
 interface AddHardwareFormProps {

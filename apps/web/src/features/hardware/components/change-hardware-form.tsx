@@ -39,20 +39,22 @@ export function ChangeHardwareForm({ hardware, suppliers }: ChangeHardwareFormPr
         say(`${saved.name} is saved.`);
       }}
     >
-      <HardwareFields suppliers={suppliers} />
+      <HardwareFields suppliers={suppliers} own={hardware.id} />
       <Checkbox name="active" label="We still use it" />
     </Form>
   );
 }
 
-function typedOf({
-  name,
-  kind,
-  unitPrice = '',
-  packSize,
-  reorderAt,
-  supplierId,
-  active,
-}: Hardware) {
-  return { name, kind, unitPrice, packSize, reorderAt, supplierId, active };
+/** What the form asks for, from what is known of the hardware now. */
+function typedOf(hardware: Hardware) {
+  const { name, kind, unitPrice = '', packSize, reorderAt, supplierId, active } = hardware;
+  const { unit, metal, colour, bin, fromCustomer, priceFromParts } = hardware;
+  const { postLengthMm, stackMinMm, stackMaxMm, settingDie, settingDieHere } = hardware;
+  return {
+    ...{ name, kind, unitPrice, packSize, reorderAt, supplierId, active },
+    ...{ unit, metal, colour, bin, fromCustomer, priceFromParts },
+    ...{ postLengthMm, stackMinMm, stackMaxMm, settingDie, settingDieHere },
+    parts: hardware.parts.map(({ hardwareId, quantity }) => ({ hardwareId, quantity })),
+    standIns: hardware.standIns.map(({ hardwareId, bothWays }) => ({ hardwareId, bothWays })),
+  };
 }

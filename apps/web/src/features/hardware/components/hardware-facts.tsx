@@ -1,39 +1,74 @@
 import type { Hardware } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
-import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { lengthText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
+import { countedText, unitWord } from '../unit-words.ts';
 
-/** The counts, large; then what it costs and who sells it. */
+/** The counts, large; then what it costs and who sells it; then what it is and how it is set. */
 export function HardwareFacts({ hardware }: { hardware: Hardware }) {
-  const { currency } = useWorkshop();
-  const { unitPrice, valueOnHand } = hardware;
-  const prices = [
-    ...(unitPrice === undefined
-      ? []
-      : [{ word: `Price, ${currency}`, figure: unitPriceText(unitPrice) }]),
-    ...(valueOnHand === undefined
-      ? []
-      : [{ word: `On hand at cost, ${currency}`, figure: moneyText(valueOnHand) }]),
+  const { unit, parts } = hardware;
+  const isKit = parts.length > 0;
+  const counts = [
+    { word: isKit ? 'Made up by its parts' : 'On hand', count: hardware.onHand },
+    { word: 'Held for jobs', count: hardware.reserved },
+    { word: 'Free', count: hardware.free },
+    { word: 'On order', count: hardware.onOrder },
   ];
   return (
     <div className="space-y-5">
       <KeyFigures
         large
-        figures={[
-          { word: 'On hand', figure: countText(hardware.onHand) },
-          { word: 'Held for jobs', figure: countText(hardware.reserved) },
-          { word: 'Free', figure: countText(hardware.free) },
-          { word: 'On order', figure: countText(hardware.onOrder) },
-        ]}
+        figures={counts.map(({ word, count }) => ({ word, figure: countedText(count, unit) }))}
       />
-      <KeyFigures
-        figures={[
-          { word: 'Keep at least', figure: countText(hardware.reorderAt) },
-          { word: 'In packs of', figure: countText(hardware.packSize) },
-          { word: 'Supplier', figure: hardware.supplierName ?? '–' },
-          ...prices,
-        ]}
-      />
+      <Buying hardware={hardware} isKit={isKit} />
+      <Details hardware={hardware} />
     </div>
   );
+}
+
+function Buying({ hardware, isKit }: { hardware: Hardware; isKit: boolean }) {
+  const { currency } = useWorkshop();
+  const { unit, unitPrice, valueOnHand, priceFromParts, fromCustomer } = hardware;
+  const bought = [
+    { word: 'Keep at least', figure: countedText(hardware.reorderAt, unit) },
+    { word: 'In packs of', figure: countedText(hardware.packSize, unit) },
+    {
+      word: 'Supplier',
+      figure: fromCustomer ? 'the customer brings it' : (hardware.supplierName ?? '–'),
+    },
+  ];
+  const prices = [
+    unitPrice !== undefined && {
+      word: `Price, ${currency}${unit === 'piece' ? '' : ` per ${unitWord(unit)}`}`,
+      figure: unitPriceText(unitPrice),
+      note: isKit && priceFromParts ? 'what its parts cost' : undefined,
+    },
+    valueOnHand !== undefined &&
+      !isKit && { word: `On hand at cost, ${currency}`, figure: moneyText(valueOnHand) },
+  ].filter((each) => each !== false);
+  return <KeyFigures figures={[...(isKit ? [] : bought), ...prices]} />;
+}
+
+function Details({ hardware }: { hardware: Hardware }) {
+  const { lengthUnit } = useWorkshop();
+  const { metal, colour, bin, postLengthMm, stackMinMm, stackMaxMm, settingDie } = hardware;
+  const length = (mm: string) => lengthText(mm, lengthUnit, lengthUnit === 'mm' ? 2 : 3);
+  const stack =
+    stackMaxMm !== null &&
+    (stackMinMm === null
+      ? `up to ${length(stackMaxMm)}`
+      : `${length(stackMinMm)} to ${length(stackMaxMm)}`);
+  const figures = [
+    { word: 'Metal', figure: metal },
+    { word: 'Colour', figure: colour },
+    { word: 'Place', figure: bin },
+    { word: 'Post', figure: postLengthMm !== null && length(postLengthMm) },
+    { word: 'Holds a stack of', figure: stack },
+    {
+      word: 'Setting die',
+      figure: settingDie,
+      note: hardware.settingDieHere ? undefined : 'not in the shop',
+    },
+  ].filter(({ figure }) => figure !== '' && figure !== false);
+  return figures.length > 0 && <KeyFigures figures={figures} />;
 }

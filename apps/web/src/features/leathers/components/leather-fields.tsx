@@ -1,7 +1,9 @@
 import { DecimalField } from '../../../components/decimal-field.tsx';
-import { MoneyField } from '../../../components/money-field.tsx';
+import { useWatch } from 'react-hook-form';
+import { AreaPriceField } from '../../../components/area-price-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
+import { thicknessText } from '../leather-words.ts';
 import { WholeFields } from './whole-fields.tsx';
 
 /** What the supplier sells, as its list reads. */
@@ -9,7 +11,7 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
   return (
     <>
       <TextField name="name" label="Name" help="such as Oak tan russet 5–6 oz" />
-      <MoneyField name="pricePerFt2" label="Price" per="ft²" />
+      <AreaPriceField name="pricePerFt2" label="Price" />
       <fieldset>
         <legend className="sr-only">Weight</legend>
         <div className="flex flex-wrap items-start gap-x-4 gap-y-3">
@@ -22,6 +24,7 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
           />
           <DecimalField name="weightHighOz" label="to" unit="oz" whenEmpty="null" optional />
         </div>
+        <Thickness />
       </fieldset>
       <TextField name="tannage" label="Tannage" optional />
       <TextField name="colour" label="Colour" optional />
@@ -39,4 +42,16 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
       <WholeFields />
     </>
   );
+}
+
+/** What was typed in ounces, in mm beside it. */
+function Thickness() {
+  const [weightLowOz, weightHighOz] = useWatch({ name: ['weightLowOz', 'weightHighOz'] }) as [
+    ...(string | null)[],
+  ];
+  const text = thicknessText({
+    weightLowOz: weightLowOz ?? null,
+    weightHighOz: weightHighOz ?? null,
+  });
+  return text !== '' && <p className="mt-1 text-sm text-ink-soft">{`That is ${text}.`}</p>;
 }

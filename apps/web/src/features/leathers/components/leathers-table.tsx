@@ -3,17 +3,19 @@ import { useMemo, type ReactNode } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, unitPriceText } from '../../../lib/formatting.ts';
+import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
+import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { weightText } from '../leather-words.ts';
 
-function columnsFor({ areaUnit, currency }: Workshop, withPrices: boolean): Column<Leather>[] {
-  const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
+function columnsFor(workshop: Workshop, withPrices: boolean): Column<Leather>[] {
+  const { areaUnit, currency } = workshop;
+  const area = (areaMm2: string) => rackAreaText(areaMm2, workshop);
   const price: Column<Leather> = {
     id: 'price',
-    header: `Price, ${currency} per ft²`,
+    header: `Price, ${currency} per ${areaUnits[areaUnit].sign}`,
     value: (row) => row.pricePerFt2,
-    cell: (row) => row.pricePerFt2 !== undefined && unitPriceText(row.pricePerFt2),
+    cell: (row) => row.pricePerFt2 !== undefined && areaPriceText(row.pricePerFt2, areaUnit),
     align: 'right',
   };
   return [

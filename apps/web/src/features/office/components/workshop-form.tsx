@@ -18,6 +18,10 @@ const areaUnits = [
   { value: 'dm2', label: 'square decimetres (dm²)' },
   { value: 'm2', label: 'square metres (m²)' },
 ];
+const areaSteps = [
+  { value: 'tenth', label: 'tenths, such as 24.8' },
+  { value: 'quarter', label: 'quarters, such as 24³' },
+];
 const lengthUnits = [
   { value: 'mm', label: 'millimetres (mm)' },
   { value: 'in', label: 'inches (in)' },
@@ -55,6 +59,13 @@ export function WorkshopForm({
       <TextArea name="address" label="Address" help="As it stands on quotes and invoices." />
       <SelectField name="currency" label="Currency" choices={currencyChoices} />
       <SelectField name="areaUnit" label="Leather is measured in" choices={areaUnits} short />
+      <SelectField
+        name="areaShown"
+        label="Square feet are shown in"
+        choices={areaSteps}
+        help="They are kept exactly as they were measured."
+        short
+      />
       <SelectField name="lengthUnit" label="Lengths are typed in" choices={lengthUnits} short />
       <SelectField
         name="timeZone"

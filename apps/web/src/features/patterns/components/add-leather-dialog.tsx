@@ -1,7 +1,7 @@
 import { addLeather, type Leather } from '@hidewright/contract';
 import { Dialog } from '../../../components/dialog.tsx';
 import { Form } from '../../../components/form.tsx';
-import { MoneyField } from '../../../components/money-field.tsx';
+import { AreaPriceField } from '../../../components/area-price-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { useAddLeather } from '../patterns.mutations.ts';
 
@@ -26,7 +26,7 @@ export function AddLeatherDialog({ open, onOpenChange, onAdded }: AddLeatherDial
         }}
       >
         <TextField name="name" label="Name" help="such as Oak tan russet 5–6 oz" />
-        <MoneyField name="pricePerFt2" label="Price" per="ft²" />
+        <AreaPriceField name="pricePerFt2" label="Price" />
       </Form>
     </Dialog>
   );

@@ -8,8 +8,9 @@ import { SelectField } from '../../../components/select-field.tsx';
 import { unitPriceText } from '../../../lib/formatting.ts';
 import { hardwareChoicesQuery } from '../patterns.queries.ts';
 import { AddHardwareDialog } from './add-hardware-dialog.tsx';
+import { LineRemarks } from './line-remarks.tsx';
 import { MoreOfHardware } from './more-of-hardware.tsx';
-import { RemoveButton } from './remove-button.tsx';
+import { RemoveButton } from '../../../components/remove-button.tsx';
 
 const name = 'definition.hardware';
 
@@ -45,6 +46,7 @@ export function HardwareFields() {
             <RemoveButton label={`Remove hardware ${at + 1}`} onRemove={() => remove(at)} />
             <div className="basis-full">
               <MoreOfHardware at={at} />
+              <LineRemarks at={at} />
             </div>
           </div>
         ))}

@@ -6,7 +6,8 @@ import { Button } from '../../../components/button.tsx';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { More } from '../../../components/more.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
-import { unitPriceText } from '../../../lib/formatting.ts';
+import { areaPriceText } from '../../../lib/formatting.ts';
+import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { leatherChoicesQuery } from '../patterns.queries.ts';
 import { AddLeatherDialog } from './add-leather-dialog.tsx';
@@ -16,7 +17,7 @@ const name = 'definition.leatherId';
 /** The leather it is made of: chosen, or added in place. */
 export function LeatherField() {
   const { setValue, clearErrors } = useFormContext();
-  const { currency } = useWorkshop();
+  const { areaUnit, currency } = useWorkshop();
   const { data: leathers = [] } = useQuery(leatherChoicesQuery());
   const [adding, setAdding] = useState(false);
   const choose = (id: number) => {
@@ -28,7 +29,7 @@ export function LeatherField() {
   const price =
     leather?.pricePerFt2 === undefined
       ? ''
-      : `${unitPriceText(leather.pricePerFt2)} ${currency} per ft²`;
+      : `${areaPriceText(leather.pricePerFt2, areaUnit)} ${currency} per ${areaUnits[areaUnit].sign}`;
   return (
     <div>
       {/* A new list is a new field: a chosen leather must stand among its choices before it can be shown. */}

@@ -1,6 +1,7 @@
 import { useWatch } from 'react-hook-form';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { More } from '../../../components/more.tsx';
+import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { FieldRow } from './field-row.tsx';
 
@@ -12,19 +13,20 @@ interface Work {
 /** From when a line of hardware is needed, and how much of it is spoiled. */
 export function MoreOfHardware({ at }: { at: number }) {
   const line = `definition.hardware.${at}`;
-  const [work, fromStep, lossPercent] = useWatch({
-    name: ['definition.work', `${line}.fromStep`, `${line}.lossPercent`],
-  }) as [Work, unknown, unknown];
+  const [work, fromStep, lossPercent, layers] = useWatch({
+    name: ['definition.work', `${line}.fromStep`, `${line}.lossPercent`, `${line}.layers`],
+  }) as [Work, unknown, unknown, unknown];
   const choices = stepChoices(work);
   const notes = [
     choices.find(({ value }) => value === fromStep)?.label,
     lossPercent ? `${String(lossPercent)} % spoiled` : undefined,
+    layers ? `through ${String(layers)} layers` : undefined,
   ];
   return (
     <More
       word="More"
       note={notes.filter(Boolean).join(', ')}
-      names={[`${line}.fromStep`, `${line}.lossPercent`]}
+      names={[`${line}.fromStep`, `${line}.lossPercent`, `${line}.layers`]}
     >
       <FieldRow>
         <div className="col-span-2 min-w-56 grow">
@@ -43,6 +45,13 @@ export function MoreOfHardware({ at }: { at: number }) {
           unit="%"
           optional
           help="of the hardware itself"
+        />
+        <NumberField
+          name={`${line}.layers`}
+          label="Through"
+          unit="layers"
+          optional
+          help="of the leather; two where it is empty"
         />
       </FieldRow>
     </More>

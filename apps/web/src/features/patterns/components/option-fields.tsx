@@ -5,7 +5,7 @@ import { More } from '../../../components/more.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { countText } from '../../../lib/formatting.ts';
 import { blankSwap } from '../typed-parts.ts';
-import { RemoveButton } from './remove-button.tsx';
+import { RemoveButton } from '../../../components/remove-button.tsx';
 import { SwapFields } from './swap-fields.tsx';
 
 const name = 'definition.options';

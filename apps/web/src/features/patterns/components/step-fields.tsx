@@ -10,7 +10,7 @@ import { afterMove, afterRemoval } from '../typed-parts.ts';
 import { blankStep } from '../typed-work.ts';
 import { FieldRow } from './field-row.tsx';
 import { MoreOfStep } from './more-of-step.tsx';
-import { RemoveButton } from './remove-button.tsx';
+import { RemoveButton } from '../../../components/remove-button.tsx';
 
 const name = 'definition.work.steps';
 const perChoices = stepUnits.map((unit) => ({ value: unit, label: `per ${unit}` }));

@@ -7,7 +7,7 @@ import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { countText } from '../../../lib/formatting.ts';
 import { FieldRow } from './field-row.tsx';
-import { RemoveButton } from './remove-button.tsx';
+import { RemoveButton } from '../../../components/remove-button.tsx';
 
 const name = 'definition.supplies';
 const most = 20;

@@ -6,7 +6,7 @@ import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { hardwareChoicesQuery, hardwareNamesQuery } from '../patterns.queries.ts';
 import { blankSwap } from '../typed-parts.ts';
-import { RemoveButton } from './remove-button.tsx';
+import { RemoveButton } from '../../../components/remove-button.tsx';
 
 const most = 10;
 

@@ -4,6 +4,7 @@ import type { ReactNode } from 'react';
 import { countText, minutesText, percentText } from '../../../lib/formatting.ts';
 import { hardwareWords, learningWords, optionWords, supplyWords } from '../pattern-words.ts';
 import { hardwareNamesQuery } from '../patterns.queries.ts';
+import { SettingRemarks } from './setting-remarks.tsx';
 import { StepsTable } from './steps-table.tsx';
 
 /** Leather, hardware, work and tooling of a pattern, in words. */
@@ -20,6 +21,7 @@ export function WhatItTakes({ pattern }: { pattern: Pattern }) {
   );
   return (
     <div className="space-y-5">
+      <SettingRemarks hardware={pattern.hardware} />
       <dl className="grid grid-cols-[auto_1fr] gap-x-6 gap-y-2">
         <Line word="leather">{pattern.leatherName}</Line>
         {Number(definition.leatherExtraPercent ?? '0') > 0 && (

@@ -1,0 +1,40 @@
+import type { SupplierOfferReply } from '@hidewright/contract';
+import type { OfferedBuy } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import { areaText, countText, moneyText } from '../../lib/formatting.ts';
+import type { Workshop } from '../../lib/workshop.tsx';
+
+type Unit = SupplierOfferReply['unit'];
+
+/** A quantity of an offer as people say it: 250, or 24.75 ft². */
+export function quantityText(quantity: string, unit: Unit, { areaUnit }: Workshop): string {
+  return unit === 'mm2' ? areaText(quantity, areaUnit) : countText(Number(quantity));
+}
+
+/** What is sold: from 100, in packs of 50. */
+export function soldText(offer: SupplierOfferReply, workshop: Workshop): string {
+  const { minimum, multiple, unit } = offer;
+  const say = (quantity: string) => quantityText(quantity, unit, workshop);
+  return [
+    minimum === null ? '' : `at least ${say(minimum)}`,
+    multiple === null ? '' : `in packs of ${say(multiple)}`,
+  ]
+    .filter(Boolean)
+    .join(', ');
+}
+
+/** 36 more pieces cost 1.20 less; nothing where buying more than is needed does not pay. */
+export function buyMoreText({ plain, next, best }: OfferedBuy, unit: Unit, workshop: Workshop) {
+  const say = (quantity: string) => quantityText(quantity, unit, workshop);
+  const more = (quantity: string) => {
+    const beyond = new Decimal(quantity).minus(plain.quantity).toFixed();
+    return unit === 'mm2' ? `${say(beyond)} more` : `${say(beyond)} more pieces`;
+  };
+  if (best.quantity !== plain.quantity) {
+    const saved = moneyText(new Decimal(plain.cost).minus(best.cost).toFixed(2));
+    return `${more(best.quantity)} cost ${saved} less: take ${say(best.quantity)} for ${moneyText(best.cost)}.`;
+  }
+  if (next === null || next.worth === 'no') return '';
+  const extra = next.dearerBy === '0.00' ? 'nothing' : `only ${moneyText(next.dearerBy)}`;
+  return `${more(next.quantity)} cost ${extra} more: ${say(next.quantity)} for ${moneyText(next.cost)}.`;
+}
