@@ -17,6 +17,7 @@ import { TaxRate } from '../../modules/tax-rates/tax-rate.entity.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import { inTransaction, theProgram, type Work } from '../../work.ts';
 import { Named, type DemoShop } from './demo-shop.ts';
+import { furnishKit, furnishOffers } from './furnish-offers.ts';
 import { furnishPlateOffers } from './furnish-tooling.ts';
 import { customers } from './scenario/customers.ts';
 import { patterns } from './scenario/patterns.ts';
@@ -100,6 +101,8 @@ async function furnishRooms(work: Work): Promise<Furnished> {
     });
     await note(work, furnished.hardware, 'hardware', part);
   }
+  await furnishKit(work, furnished);
+  await furnishOffers(work, furnished);
   const createdAt = work.now.toISOString();
   for (const each of customers)
     await note(

@@ -139,6 +139,22 @@ export const hardware = [
     reorderAt: 250,
     supplier: 'Fennbridge Fittings',
   },
+  {
+    name: 'Rivet caps 7 mm, nickel',
+    kind: 'hardware',
+    unitPrice: '0.05',
+    packSize: 100,
+    reorderAt: 0,
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'Rivet posts 8 mm, nickel',
+    kind: 'hardware',
+    unitPrice: '0.045',
+    packSize: 100,
+    reorderAt: 0,
+    supplier: 'Fennbridge Fittings',
+  },
 ] as const satisfies { supplier: SupplierName; [field: string]: string | number }[];
 export type HardwareName = (typeof hardware)[number]['name'];
 
@@ -240,6 +256,8 @@ export const purchases: Purchase[] = [
       { name: 'Buckles 20 mm, solid brass', quantity: 200 },
       { name: 'Snaps, line 20, brass', quantity: 600 },
       { name: 'Card sleeves, kraft', quantity: 750 },
+      { name: 'Rivet caps 7 mm, nickel', quantity: 200 },
+      { name: 'Rivet posts 8 mm, nickel', quantity: 200 },
     ],
   },
   {

@@ -10,6 +10,7 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 import { signedText } from '../movement-words.ts';
 import { useAdjustStock } from '../stock.mutations.ts';
 import { HeldLines } from './held-list.tsx';
+import { WeighInto } from './weigh-into.tsx';
 
 type Adjusted = ReplyOf<typeof adjustStock>;
 
@@ -48,7 +49,10 @@ export function AdjustForm({ item }: AdjustFormProps) {
             help="24.75 or 24³; 0 when it is used up."
           />
         ) : (
-          <NumberField name="counted" label="Counted now" unit="pieces" />
+          <>
+            <NumberField name="counted" label="Counted now" unit="pieces" />
+            <WeighInto name="counted" />
+          </>
         )}
         <TextField name="reason" label="Why" />
       </Form>
