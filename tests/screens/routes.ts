@@ -37,6 +37,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
     { name: 'purchase-order-new', path: '/stockroom/purchase-orders/new' },
     { name: 'receive', path: '/stockroom/receive' },
+    { name: 'scan', path: '/stockroom/scan' },
     { name: 'invoices', path: '/books/invoices' },
     { name: 'office', path: '/office' },
     { name: 'people', path: '/office/people' },
@@ -52,6 +53,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'hardware', path: '/stockroom/hardware' },
     { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
     { name: 'receive', path: '/stockroom/receive' },
+    { name: 'scan', path: '/stockroom/scan' },
   ],
   bookkeeper: [
     { name: 'quotes', path: '/counter/quotes' },

@@ -31,6 +31,7 @@ import { periodRoutes } from './modules/periods/periods.routes.ts';
 import { pressRoutes } from './modules/presses/presses.routes.ts';
 import { purchaseOrderRoutes } from './modules/purchase-orders/purchase-orders.routes.ts';
 import { quoteRoutes } from './modules/quotes/quotes.routes.ts';
+import { scanRoutes } from './modules/scans/scans.routes.ts';
 import { searchRoutes } from './modules/search/search.routes.ts';
 import { stockRoutes } from './modules/stock/stock.routes.ts';
 import { supplierOfferRoutes } from './modules/supplier-offers/supplier-offers.routes.ts';
@@ -54,6 +55,7 @@ const rooms: ((context: Context) => Router)[] = [
   activityRoutes,
   todayRoutes,
   searchRoutes,
+  scanRoutes,
   customerRoutes,
   quoteRoutes,
   linkRoutes,

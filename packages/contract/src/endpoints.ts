@@ -22,6 +22,7 @@ import * as plateOffers from './plate-offers.ts';
 import * as presses from './presses.ts';
 import * as purchaseOrders from './purchase-orders.ts';
 import * as quotes from './quotes.ts';
+import * as scans from './scans.ts';
 import * as search from './search.ts';
 import * as session from './session.ts';
 import * as stock from './stock.ts';
@@ -45,6 +46,7 @@ const rooms: Record<string, unknown>[] = [
   activity,
   today,
   search,
+  scans,
   customers,
   quotes,
   links,

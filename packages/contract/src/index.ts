@@ -30,6 +30,7 @@ export * from './problem.ts';
 export * from './purchase-orders.ts';
 export * from './quote-body.ts';
 export * from './quotes.ts';
+export * from './scans.ts';
 export * from './search.ts';
 export * from './session.ts';
 export * from './stock.ts';

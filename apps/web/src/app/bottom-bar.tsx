@@ -1,13 +1,16 @@
 import { Menu } from '@base-ui/react/menu';
 import type { Role } from '@hidewright/contract';
 import { useState } from 'react';
-import { NavLink, useNavigate } from 'react-router-dom';
+import { NavLink, useLocation, useNavigate } from 'react-router-dom';
 import { menuLook } from './menu-look.ts';
-import { RoomIcon } from './room-icon.tsx';
+import { RoomIcon, type RoomIconName } from './room-icon.tsx';
 import { roomsFor } from './rooms.ts';
 
 const itemLook =
   'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 rounded px-1 text-center text-sm leading-tight outline-offset-0!';
+
+/** Whoever works with the stock has it a thumb away. */
+const scanPath = '/stockroom/scan';
 
 /** On a phone: the rooms that the role uses most, the others behind More. */
 export function BottomBar({ role }: { role: Role }) {
@@ -23,17 +26,14 @@ export function BottomBar({ role }: { role: Role }) {
       <ul className="flex px-1 py-1">
         {shown.map((room) => (
           <li key={room.path} className="flex-1">
-            <NavLink
-              to={room.path}
-              className={({ isActive }) =>
-                `${itemLook} ${isActive ? 'font-bold text-verdigris underline decoration-dashed decoration-2 underline-offset-4' : 'text-ink-soft'}`
-              }
-            >
-              <RoomIcon name={room.icon} size={22} />
-              {room.word}
-            </NavLink>
+            <BarLink to={room.path} icon={room.icon} word={room.word} />
           </li>
         ))}
+        {role === 'maker' && (
+          <li className="flex-1">
+            <BarLink to={scanPath} icon="scan" word="Scan" />
+          </li>
+        )}
         {others.length > 0 && (
           <li className="flex-1">
             <MoreRooms others={others} />
@@ -41,6 +41,22 @@ export function BottomBar({ role }: { role: Role }) {
         )}
       </ul>
     </nav>
+  );
+}
+
+function BarLink({ to, icon, word }: { to: string; icon: RoomIconName; word: string }) {
+  const { pathname } = useLocation();
+  const elsewhere = to !== scanPath && pathname === scanPath;
+  return (
+    <NavLink
+      to={to}
+      className={({ isActive }) =>
+        `${itemLook} ${isActive && !elsewhere ? 'font-bold text-verdigris underline decoration-dashed decoration-2 underline-offset-4' : 'text-ink-soft'}`
+      }
+    >
+      <RoomIcon name={icon} size={22} />
+      {word}
+    </NavLink>
   );
 }
 

@@ -9,6 +9,7 @@ const drawings = {
   books:
     'M12 6.5C10 5 7 4.7 4 5v13.5c3-.3 6 0 8 1.5 2-1.5 5-1.8 8-1.5V5c-3-.3-6 0-8 1.5zM12 6.5V20',
   office: 'M6 3.5h12v17H6zM9 8h6M9 12h6M9 16h3.5',
+  scan: 'M4 8V4h4M16 4h4v4M20 16v4h-4M8 20H4v-4M8 9v6M11 9v6M13.5 9v6M16 9v6',
   more: 'M5 12h.01M12 12h.01M19 12h.01',
 } as const;
 

@@ -31,7 +31,7 @@ export const rooms: readonly Room[] = [
     word: 'Pattern room',
     icon: 'pattern-room',
     roles: ['owner', 'maker'],
-    bar: ['maker'],
+    bar: [],
   },
   {
     path: '/bench',

@@ -10,6 +10,7 @@ import { linkRoutes } from './routes/link.routes.ts';
 import { officeRoutes } from './routes/office.routes.ts';
 import { patternRoomRoutes } from './routes/pattern-room.routes.ts';
 import { stockroomRoutes } from './routes/stockroom.routes.ts';
+import { tagRoutes } from './routes/tag.routes.ts';
 import { todayRoutes } from './routes/today.routes.ts';
 import { Shell } from './shell.tsx';
 
@@ -40,6 +41,7 @@ export const router: ReturnType<typeof createBrowserRouter> = createBrowserRoute
               ...stockroomRoutes,
               ...booksRoutes,
               ...officeRoutes,
+              ...tagRoutes,
               { path: '/closed/:room', lazy: () => import('./routes/closed-room.tsx') },
               { path: '*', lazy: () => import('./routes/not-found.tsx') },
             ],

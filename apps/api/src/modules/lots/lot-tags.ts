@@ -1,15 +1,19 @@
+import { hardwareOfBin } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { drawPaperNumber } from '../../db/counters.ts';
 import { invalid } from '../../http/problem.ts';
 import { Lot } from './lot.entity.ts';
 
-/** @throws {Problem} 422 beside `field` when another lot hangs by that tag */
+/** @throws {Problem} 422 beside `field` when another lot or a bin goes by that tag */
 export async function requireFreeTag(
   em: EntityManager,
   tag: string,
   field: string,
   id?: number,
 ): Promise<void> {
+  if (hardwareOfBin(tag) !== undefined) {
+    throw invalid([{ field, message: `Tags such as ${tag} are for bins. Choose another tag.` }]);
+  }
   const lot = await em.findOne(Lot, { tag });
   if (lot === null || lot.id === id) return;
   throw invalid([

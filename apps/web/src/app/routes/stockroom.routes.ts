@@ -11,6 +11,11 @@ export const stockroomRoutes: RouteObject[] = [
     children: [
       { index: true, lazy: () => import('./stockroom/index.tsx') },
       {
+        path: 'scan',
+        handle: { crumb: 'Scan' },
+        lazy: () => import('./stockroom/scan.tsx'),
+      },
+      {
         path: 'receive',
         handle: { crumb: 'Receive' },
         lazy: () => import('./stockroom/receive.tsx'),

@@ -1,0 +1,54 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { ft2, orderMore, stockUp } from '../../testing/stockroom.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let shop: Awaited<ReturnType<typeof startTestShop>>;
+let things: Awaited<ReturnType<typeof stockUp>>;
+let lot: { id: number; tag: string };
+
+beforeAll(async () => {
+  shop = await startTestShop();
+  things = await stockUp(shop);
+  const { body } = await shop
+    .as('owner')
+    .post('/api/receipts')
+    .send({ lots: [{ leatherId: things.leatherId, form: 'side', measuredAreaMm2: ft2(22) }] })
+    .expect(201);
+  lot = body.lots[0];
+});
+afterAll(() => shop.close());
+
+const scan = (code: string) => shop.as('maker').get(`/api/scans/${encodeURIComponent(code)}`);
+
+describe('a scan', () => {
+  it('opens the lot whose tag it is, bare, in small letters or as an address', async () => {
+    const address = `https://shop.example.com/t/${lot.tag}`;
+    for (const code of [lot.tag, lot.tag.toLowerCase(), address, `${lot.tag}\r`]) {
+      const { body } = await scan(code).expect(200);
+      expect(body).toMatchObject({ kind: 'lot', id: lot.id, to: `/stockroom/lots/${lot.id}` });
+    }
+  });
+
+  it('opens a bin and an order to a supplier', async () => {
+    const bin = `B-${String(things.hardwareId).padStart(4, '0')}`;
+    const { body } = await scan(bin).expect(200);
+    expect(body).toMatchObject({ kind: 'hardware', id: things.hardwareId, tag: bin });
+    const order = await orderMore(shop, things);
+    const { body: found } = await scan('P-0001').expect(200);
+    expect(found).toMatchObject({ kind: 'purchase order', id: order.id });
+  });
+
+  it('that is no tag says what was read and what to do', async () => {
+    for (const code of ['4006381333931', 'B-9999', '%', 'x'.repeat(100)]) {
+      const { body } = await scan(code).expect(404);
+      expect(body.detail).toContain(`“${code.slice(0, 60)}”`);
+      expect(body.detail).toContain('Scan it again');
+    }
+  });
+
+  it('never lets a lot hang by the tag of a bin', async () => {
+    const change = shop.as('owner').patch(`/api/lots/${lot.id}`).set('If-Match', '"1"');
+    const { body } = await change.send({ tag: 'b-0007' }).expect(422);
+    expect(body.errors[0]).toMatchObject({ field: 'tag' });
+  });
+});
