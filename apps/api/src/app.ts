@@ -12,6 +12,7 @@ import { notFound } from './http/problem.ts';
 import { sameOrigin } from './http/same-origin.ts';
 import { sessions } from './http/session.ts';
 import { activityRoutes } from './modules/activity/activity.routes.ts';
+import { countRoutes } from './modules/counts/counts.routes.ts';
 import { customerRoutes } from './modules/customers/customers.routes.ts';
 import { designRoutes } from './modules/designs/designs.routes.ts';
 import { hardwareRoutes } from './modules/hardware/hardware.routes.ts';
@@ -77,6 +78,7 @@ const rooms: ((context: Context) => Router)[] = [
   supplierOfferRoutes,
   purchaseOrderRoutes,
   stockRoutes,
+  countRoutes,
   invoiceRoutes,
   taxRateRoutes,
   periodRoutes,

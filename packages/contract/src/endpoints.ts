@@ -1,5 +1,6 @@
 import * as activity from './activity.ts';
 import * as benchHours from './bench-hours.ts';
+import * as counts from './counts.ts';
 import * as customers from './customers.ts';
 import * as cutAdvice from './cut-advice.ts';
 import * as designs from './designs.ts';
@@ -74,6 +75,7 @@ const rooms: Record<string, unknown>[] = [
   supplierOffers,
   purchaseOrders,
   stock,
+  counts,
   invoices,
   taxRates,
   periods,

@@ -1,6 +1,7 @@
 export * from './activity.ts';
 export * from './bench-hours.ts';
 export * from './confidential.ts';
+export * from './counts.ts';
 export * from './customers.ts';
 export * from './cut-advice.ts';
 export * from './designs.ts';

@@ -103,6 +103,7 @@ export * from './stock/order-quantity.ts';
 export * from './stock/production-lot.ts';
 export * from './stock/reorder-point.ts';
 export * from './stock/forecast.ts';
+export * from './stock/count-outcome.ts';
 export * from './stock/scanned-tag.ts';
 export * from './stock/stock-cost.ts';
 export * from './stock/available-to-promise.ts';

@@ -1,5 +1,7 @@
 import { IdempotentReply } from '../http/idempotency.entity.ts';
 import { Activity } from '../modules/activity/activity.entity.ts';
+import { CountLine } from '../modules/counts/count-line.entity.ts';
+import { StockCount } from '../modules/counts/stock-count.entity.ts';
 import { Customer } from '../modules/customers/customer.entity.ts';
 import { StoredFile } from '../modules/files/stored-file.entity.ts';
 import { Design } from '../modules/designs/design.entity.ts';
@@ -48,6 +50,8 @@ export const entities = [
   Activity,
   BenchLog,
   Counter,
+  CountLine,
+  StockCount,
   Customer,
   CustomerLink,
   Design,

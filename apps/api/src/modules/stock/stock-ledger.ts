@@ -141,20 +141,61 @@ export async function adjustStock(
   }
   const { onHand, reserved } = await freeOf(work.em, asked);
   const quantity = asked.counted - onHand;
-  const value = await costOf(work.em, asked, Math.abs(quantity));
+  const value = await costOfChange(work.em, asked, quantity);
   const movement =
     quantity === 0
       ? null
       : await move(work, asked, {
           kind: 'adjust',
           quantity,
-          value: quantity < 0 ? value.negated() : value,
+          value,
           reason: asked.reason,
         });
   return {
     movement,
     broken: asked.counted < reserved ? await openReservations(work.em, keysOf(asked)) : [],
   };
+}
+
+/**
+ * Adds to the books what a count found more, or takes from them what it found less.
+ * @throws {RangeError} when less than nothing would be left; whoever asks has to see to that
+ */
+export async function postCount(
+  work: Work,
+  { difference, reason, ...item }: { difference: number; reason: string } & StockItem,
+): Promise<StockMovement> {
+  const { onHand } = await freeOf(work.em, item);
+  if (onHand + difference < 0) throw new RangeError('A count never leaves less than nothing');
+  const value = await costOfChange(work.em, item, difference);
+  return move(work, item, { kind: 'count', quantity: difference, value, reason });
+}
+
+/** What a change of what is on hand is worth, signed like it, to the cent. */
+export async function costOfChange(
+  em: EntityManager,
+  item: StockItem,
+  change: number,
+): Promise<Decimal> {
+  const value = await costOf(em, item, Math.abs(change));
+  return change < 0 ? value.negated() : value;
+}
+
+/** What the books said was on hand at an instant. */
+export async function onHandAt(em: EntityManager, item: StockItem, at: string): Promise<number> {
+  const { lotId, hardwareId } = keysOf(item);
+  const [row] = await em.execute<[{ on_hand: number }]>(
+    `SELECT COALESCE(SUM(quantity), 0) AS on_hand FROM stock_movement
+     WHERE lot_id IS ? AND hardware_id IS ? AND at <= ?`,
+    [lotId, hardwareId, at],
+  );
+  return row.on_hand;
+}
+
+/** Whether an item was counted or adjusted after an instant, so that an earlier count says nothing any more. */
+export async function setSince(em: EntityManager, item: StockItem, at: string): Promise<boolean> {
+  const set = { ...keysOf(item), kind: { $in: ['adjust', 'count'] as const }, at: { $gt: at } };
+  return (await em.count(StockMovement, set)) > 0;
 }
 
 /** Lets go of everything that is still held for a job, or of one item; gives how much that was. */

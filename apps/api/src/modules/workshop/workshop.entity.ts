@@ -31,6 +31,8 @@ export class Workshop {
     | 'setUpCharge'
     | 'minimumOrder'
     | 'priceRule'
+    | 'stockValue'
+    | 'stockValueAfter'
     | 'address'
     | 'taxNumber'
     | 'version';
@@ -131,6 +133,14 @@ export class Workshop {
   /** How a price that nobody typed is worked out. */
   @Property({ type: JsonText, columnType: 'text' })
   priceRule: PriceRule = { kind: 'target' };
+
+  /** How hardware and supplies are valued; a lot always stands at its own cost. */
+  @Property({ type: 'text', columnType: 'text' })
+  stockValue: 'moving average' | 'first in first out' = 'moving average';
+
+  /** The ledger's last row when that was chosen: what was there then is the oldest layer. */
+  @Property({ type: 'integer', columnType: 'integer' })
+  stockValueAfter = 0;
 
   @Property({ type: 'text', columnType: 'text' })
   address = '';
