@@ -41,6 +41,9 @@ export const stateLooks: Readonly<Record<string, Look>> = {
   late: ['cross', 'danger'],
   overdue: ['cross', 'danger'],
   short: ['cross', 'danger'],
+  'handed in': ['arrow', 'info'],
+  approved: ['check', 'act'],
+  again: ['wait', 'attention'],
   open: ['hollow', 'act'],
   locked: ['check', 'quiet'],
 };

@@ -2,6 +2,7 @@ import type { RouteObject } from 'react-router-dom';
 
 const nameOf = (thing: unknown) => (thing as { name: string }).name;
 const tagOf = (lot: unknown) => (lot as { tag: string }).tag;
+const titleOf = (sheet: unknown) => (sheet as { title: string }).title;
 const numberOf = (order: unknown) => (order as { number: string }).number;
 
 export const stockroomRoutes: RouteObject[] = [
@@ -10,6 +11,18 @@ export const stockroomRoutes: RouteObject[] = [
     handle: { crumb: 'Stockroom' },
     children: [
       { index: true, lazy: () => import('./stockroom/index.tsx') },
+      {
+        path: 'counts',
+        handle: { crumb: 'Counts' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/counts.tsx') },
+          {
+            path: ':id',
+            handle: { crumb: titleOf },
+            lazy: () => import('./stockroom/count.tsx'),
+          },
+        ],
+      },
       {
         path: 'scan',
         handle: { crumb: 'Scan' },

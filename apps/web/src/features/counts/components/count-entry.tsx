@@ -1,0 +1,122 @@
+import type { CountLine } from '@hidewright/contract';
+import { CircleCheck, Clock } from 'lucide-react';
+import { useId, useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { InputFrame, inputLook } from '../../../components/input-frame.tsx';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { areaUnits } from '../../../lib/units.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { figureOf, readEntry } from '../count-words.ts';
+import type { Entry } from '../entry-outbox.ts';
+
+interface CountEntryProps {
+  line: CountLine;
+  /** What was typed here and has not arrived yet. */
+  waits: boolean;
+  onEnter: (entry: Entry) => void;
+  /** The figure is finished: send it. */
+  onDone: () => void;
+  onNext: () => void;
+}
+
+export const entryId = (lineId: number): string => `count-line-${lineId}`;
+
+/** One thing to count: its tag and name, and what is there of it. */
+export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryProps) {
+  const { areaUnit } = useWorkshop();
+  const id = useId();
+  const ofLot = line.lotId !== null;
+  const figure = figureOf(line, areaUnit);
+  const [typed, setTyped] = useState<string>();
+  const text = typed ?? figure;
+  const entry = readEntry(text, ofLot, areaUnit);
+  const wrong = typeof entry === 'string' ? entry : undefined;
+
+  function type(next: string) {
+    setTyped(next);
+    const read = readEntry(next, ofLot, areaUnit);
+    if (typeof read !== 'string') onEnter(read);
+  }
+
+  return (
+    <li className="rounded border border-stitch bg-card px-3.5 py-3">
+      <div className="flex flex-wrap items-baseline justify-between gap-x-4">
+        <label htmlFor={entryId(line.id)} className="font-semibold">
+          {line.tag}
+          <span className="ml-2 font-normal text-ink-soft">{describe(line)}</span>
+        </label>
+        <EntryState line={line} waits={waits} />
+      </div>
+      <div className="mt-2 flex flex-wrap items-center gap-2">
+        <InputFrame
+          id={entryId(line.id)}
+          unit={ofLot ? areaUnits[areaUnit].sign : 'pieces'}
+          short
+          invalid={wrong !== undefined}
+        >
+          <input
+            id={entryId(line.id)}
+            type="text"
+            inputMode={ofLot ? 'text' : 'numeric'}
+            autoComplete="off"
+            enterKeyHint="next"
+            value={text}
+            aria-invalid={wrong !== undefined}
+            aria-describedby={wrong === undefined ? undefined : `${id}-wrong`}
+            onChange={(event) => type(event.target.value)}
+            onBlur={() => {
+              if (wrong === undefined) setTyped(undefined);
+              onDone();
+            }}
+            onKeyDown={(event) => {
+              if (event.key === 'Enter') onNext();
+            }}
+            className={`${inputLook} min-h-11 text-lg`}
+          />
+        </InputFrame>
+        {ofLot && (
+          <Button
+            className="min-h-11"
+            tone={line.unmeasured ? 'primary' : 'secondary'}
+            aria-pressed={line.unmeasured}
+            onClick={() => {
+              setTyped(undefined);
+              onEnter(line.unmeasured ? {} : { unmeasured: true });
+              onDone();
+            }}
+          >
+            Hangs there uncut
+          </Button>
+        )}
+      </div>
+      {wrong !== undefined && (
+        <p id={`${id}-wrong`} className="mt-1 text-sm font-semibold text-oxblood">
+          {wrong}
+        </p>
+      )}
+    </li>
+  );
+}
+
+function describe({ name, form, place, added }: CountLine): string {
+  return [name, form, place, added && 'found here'].filter(Boolean).join(' · ');
+}
+
+/** Whether it stands on the sheet at the workshop's computer. */
+function EntryState({ line, waits }: { line: CountLine; waits: boolean }) {
+  if (waits) {
+    return (
+      <span className="inline-flex items-center gap-1.5 text-sm text-brass">
+        <Clock size={16} aria-hidden="true" /> waits to be sent
+      </span>
+    );
+  }
+  if (line.countedAt !== null) {
+    return (
+      <span className="inline-flex items-center gap-1.5 text-sm text-verdigris">
+        <CircleCheck size={16} aria-hidden="true" /> {line.countedByName}
+      </span>
+    );
+  }
+  return line.again ? <StateMark state="again">count again</StateMark> : null;
+}

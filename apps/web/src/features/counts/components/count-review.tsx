@@ -1,0 +1,75 @@
+import type { CountLine, StockCount } from '@hidewright/contract';
+import { useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
+import { Notice } from '../../../components/notice.tsx';
+import { say } from '../../../components/toast.ts';
+import { moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { useApproveCount, useCountAgain } from '../counts.mutations.ts';
+import { CountLinesTable } from './count-lines-table.tsx';
+
+/** What was counted against the books: look, have lines counted again, approve. */
+export function CountReview({ sheet, isOwner }: { sheet: StockCount; isOwner: boolean }) {
+  const [again, setAgain] = useState<readonly number[]>([]);
+  const [asking, setAsking] = useState(false);
+  const recount = useCountAgain();
+  const approve = useApproveCount();
+  const { currency } = useWorkshop();
+  const decides = isOwner && sheet.state === 'handed in';
+  const params = { id: sheet.id };
+  const differences = sheet.lines.filter(differs).length;
+
+  async function askAgain() {
+    await recount.mutateAsync({ params, body: { lineIds: [...again] } });
+    setAgain([]);
+    say(`${sheet.title} is back for counting.`);
+  }
+
+  return (
+    <div className="space-y-4">
+      {recount.error && (
+        <Notice tone="danger" live>
+          {recount.error.message}
+        </Notice>
+      )}
+      <CountLinesTable sheet={sheet} chosen={again} onChoose={decides ? setAgain : undefined} />
+      {decides && (
+        <div className="flex flex-wrap justify-end gap-2">
+          <Button
+            className="min-h-11"
+            disabled={again.length === 0}
+            busy={recount.isPending}
+            onClick={() => void askAgain()}
+          >
+            {again.length === 0
+              ? 'Tick lines to count again'
+              : `Count ${lineWord(again.length)} again`}
+          </Button>
+          <Button tone="primary" className="min-h-11" onClick={() => setAsking(true)}>
+            Approve
+          </Button>
+        </div>
+      )}
+      <ConfirmDialog
+        open={asking}
+        onOpenChange={setAsking}
+        title={`Approve ${sheet.title}?`}
+        confirmWord="Approve it"
+        onConfirm={async () => {
+          await approve.mutateAsync({ params, body: {} });
+          say(`${sheet.title} is approved.`);
+        }}
+      >
+        {differences === 0
+          ? 'Everything is as the books say; nothing moves.'
+          : `${differences === 1 ? '1 difference' : `${differences} differences`} of ${moneyText(sheet.differenceValue ?? '0')} ${currency} go into the ledger and cannot be taken out again.`}
+      </ConfirmDialog>
+    </div>
+  );
+}
+
+const lineWord = (count: number) => (count === 1 ? '1 line' : `${count} lines`);
+
+const differs = ({ differenceAreaMm2, differenceQuantity }: CountLine): boolean =>
+  Number(differenceAreaMm2 ?? differenceQuantity ?? 0) !== 0;

@@ -1,0 +1,30 @@
+import { describe, expect, it } from 'vitest';
+import { countedText, figureOf, readEntry } from './count-words.ts';
+
+const blank = { lotId: 1, countedAreaMm2: null, countedQuantity: null, unmeasured: false };
+
+describe('what is typed while counting', () => {
+  it('is an area of a lot, as people write it', () => {
+    expect(readEntry('24³', true, 'ft2')).toEqual({ areaMm2: '2299350.24' });
+    expect(readEntry('0', true, 'ft2')).toEqual({ areaMm2: '0' });
+    expect(readEntry('-2', true, 'ft2')).toMatch(/^Enter the area in ft²/);
+  });
+
+  it('is a whole number of pieces of hardware', () => {
+    expect(readEntry(' 1,200 ', false, 'ft2')).toEqual({ quantity: 1200 });
+    for (const wrong of ['-1', '1.5', 'many', '123456789'])
+      expect(readEntry(wrong, false, 'ft2')).toMatch(/^Enter how many/);
+  });
+
+  it('takes the count away when it is emptied', () => {
+    expect(readEntry('  ', true, 'ft2')).toEqual({});
+  });
+
+  it('is shown again as it was typed', () => {
+    expect(figureOf({ ...blank, countedAreaMm2: '2299350.24' }, 'ft2')).toBe('24.75');
+    expect(figureOf({ ...blank, countedQuantity: 0 }, 'ft2')).toBe('0');
+    expect(figureOf(blank, 'ft2')).toBe('');
+    expect(countedText(blank, 'ft2')).toBe('not counted');
+    expect(countedText({ ...blank, unmeasured: true }, 'ft2')).toBe('hangs there, not measured');
+  });
+});

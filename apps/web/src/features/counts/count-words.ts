@@ -1,0 +1,43 @@
+import type { CountLine } from '@hidewright/contract';
+import { areaText, countText } from '../../lib/formatting.ts';
+import { areaFigure, areaUnits, readArea, type AreaUnit } from '../../lib/units.ts';
+import type { Entry } from './entry-outbox.ts';
+
+type Counted = Pick<CountLine, 'lotId' | 'countedAreaMm2' | 'countedQuantity' | 'unmeasured'>;
+
+/** What stands in the field of a line: the figure as it is typed, in the shop's unit. */
+export function figureOf(line: Counted, unit: AreaUnit): string {
+  if (line.countedAreaMm2 !== null) return areaFigure(line.countedAreaMm2, unit, 4);
+  return line.countedQuantity === null ? '' : String(line.countedQuantity);
+}
+
+/** What was typed as an entry; a sentence where it is none. */
+export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry | string {
+  const typed = text.trim();
+  if (typed === '') return {};
+  if (ofLot) {
+    const areaMm2 = readArea(typed, unit);
+    return areaMm2 === undefined
+      ? `Enter the area in ${areaUnits[unit].sign}, such as 24.75 or 24³; 0 when it is gone.`
+      : { areaMm2 };
+  }
+  const plain = typed.replaceAll(',', '');
+  return /^\d{1,8}$/.test(plain)
+    ? { quantity: Number(plain) }
+    : 'Enter how many pieces there are; 0 when there are none.';
+}
+
+/** What was counted, in words. */
+export function countedText(line: Counted, unit: AreaUnit): string {
+  if (line.unmeasured) return 'hangs there, not measured';
+  return quantityText(line.countedAreaMm2, line.countedQuantity, unit) ?? 'not counted';
+}
+
+export function quantityText(
+  areaMm2: string | null | undefined,
+  quantity: number | null | undefined,
+  unit: AreaUnit,
+): string | undefined {
+  if (typeof areaMm2 === 'string') return areaText(areaMm2, unit);
+  return typeof quantity === 'number' ? countText(quantity) : undefined;
+}
