@@ -38,6 +38,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'purchase-order-new', path: '/stockroom/purchase-orders/new' },
     { name: 'receive', path: '/stockroom/receive' },
     { name: 'scan', path: '/stockroom/scan' },
+    { name: 'counts', path: '/stockroom/counts' },
     { name: 'invoices', path: '/books/invoices' },
     { name: 'office', path: '/office' },
     { name: 'people', path: '/office/people' },
@@ -54,6 +55,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
     { name: 'receive', path: '/stockroom/receive' },
     { name: 'scan', path: '/stockroom/scan' },
+    { name: 'counts', path: '/stockroom/counts' },
   ],
   bookkeeper: [
     { name: 'quotes', path: '/counter/quotes' },
@@ -146,6 +148,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     name: 'leather-one',
     list: '/leathers',
     page: (id) => `/stockroom/leather/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'count',
+    list: '/counts',
+    page: (id) => `/stockroom/counts/${id}`,
     roles: ['owner', 'maker'],
   },
   { name: 'lot', list: '/lots', page: (id) => `/stockroom/lots/${id}`, roles: ['owner', 'maker'] },

@@ -45,6 +45,12 @@ export const stockRules: Rule[] = [
     WHERE came <> n.received`,
   ),
   none(
+    'An approved count posted each of its differences, and no other sheet posted any',
+    `SELECT c.title || ' line ' || l.id || ' differs by ' || COALESCE(l.counted - l.book, 0) || ', posted ' || COALESCE(m.quantity, 0) AS fault
+    FROM count_line l JOIN stock_count c ON c.id = l.count_id LEFT JOIN stock_movement m ON m.id = l.movement_id
+    WHERE COALESCE(m.quantity, 0) <> CASE c.state WHEN 'approved' THEN COALESCE(l.counted - l.book, 0) ELSE 0 END`,
+  ),
+  none(
     'A tool’s uses equal the sum of its ledger',
     `SELECT t.kind || ' ' || t.number || ' says ' || t.used || ' uses, its ledger ' || COALESCE(SUM(i.uses), 0) AS fault
     FROM tool t LEFT JOIN impression i ON i.tool_id = t.id GROUP BY t.id HAVING COALESCE(SUM(i.uses), 0) <> t.used`,
