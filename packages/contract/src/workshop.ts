@@ -29,6 +29,8 @@ function isTimeZone(name: string): boolean {
   }
 }
 
+export const stockValues = ['moving average', 'first in first out'] as const;
+
 const settings = {
   name: line(80, 'Enter the name of the shop.'),
   currency: z.string().regex(/^[A-Z]{3}$/, 'Choose a currency.'),
@@ -62,6 +64,8 @@ const settings = {
   setUpCharge: money,
   minimumOrder: money,
   priceRule,
+  /** How hardware and supplies are valued from now on; a lot stands at its own cost. */
+  stockValue: z.enum(stockValues, 'Choose how stock is valued.'),
   paymentTermDays: count.max(365, 'Enter at most 365 days.'),
   address: paragraph(400),
   taxNumber: optionalLine(40),
@@ -96,6 +100,7 @@ export const workshop = z
     setUpCharge: confidential(z.string()),
     minimumOrder: confidential(z.string()),
     priceRule: confidential(priceRule),
+    stockValue: confidential(z.enum(stockValues)),
     paymentTermDays: z.int(),
     address: z.string(),
     taxNumber: confidential(z.string()),

@@ -106,6 +106,7 @@ export * from './stock/forecast.ts';
 export * from './stock/count-outcome.ts';
 export * from './stock/scanned-tag.ts';
 export * from './stock/stock-cost.ts';
+export * from './stock/stock-layers.ts';
 export * from './stock/available-to-promise.ts';
 export * from './stock/supplier-offer.ts';
 export * from './stock/best-buy.ts';

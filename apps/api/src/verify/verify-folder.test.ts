@@ -83,6 +83,11 @@ describe('verifying a data folder', () => {
       'UPDATE purchase_line SET received = received - 1 WHERE received > 0',
       'what was received on it',
     ],
+    [
+      'what was counted',
+      `UPDATE count_line SET counted = counted + 1 WHERE movement_id IS NOT NULL`,
+      'posted each of its differences',
+    ],
     ['a tool’s wear', `UPDATE tool SET used = used - 1 WHERE used > 0`, 'sum of its ledger'],
     [
       'a price that was quoted',

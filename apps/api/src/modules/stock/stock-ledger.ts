@@ -1,4 +1,4 @@
-import type { Decimal } from 'decimal.js';
+import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
@@ -8,7 +8,7 @@ import { Reservation } from './reservation.entity.ts';
 import { StockBalance } from './stock-balance.entity.ts';
 import { itemOf, keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
-import { shareOfCost, valueOnHand } from './stock-value.ts';
+import { costOfComing, costOfGoing, shareOfCost } from './stock-value.ts';
 
 /*
  * The one place that writes movements, balances and reservations: they change together, so that what is kept always
@@ -101,7 +101,7 @@ export async function takeStock(work: Work, asked: Taken & StockItem): Promise<S
   const own = held.reduce((sum, reservation) => sum + reservation.open, 0);
   const most = Math.min(onHand, own + free);
   if (quantity > most) throw await tooLittle(work, asked, quantity, most);
-  const value = (await costOf(work.em, asked, quantity)).negated();
+  const value = (await costOfGoing(work.em, asked, quantity)).negated();
   await useHeld(work.em, held, quantity);
   return move(work, asked, { kind: 'take', quantity: -quantity, value, jobId, reason });
 }
@@ -116,7 +116,7 @@ export async function returnStock(
 ): Promise<StockMovement> {
   const { jobId, quantity, reason = '' } = asked;
   requireQuantity(quantity);
-  const taken = await takenBy(work.em, asked, jobId);
+  const { taken, cost } = await takenBy(work.em, asked, jobId);
   if (quantity > taken) {
     const { name, say } = await describeItem(work.em, asked);
     throw wrongState(
@@ -124,7 +124,7 @@ export async function returnStock(
       [`return up to ${say(taken)}`],
     );
   }
-  const value = await costOf(work.em, asked, quantity);
+  const value = shareOfCost(quantity, { of: taken, cost });
   return move(work, asked, { kind: 'return', quantity, value, jobId, reason });
 }
 
@@ -177,8 +177,9 @@ export async function costOfChange(
   item: StockItem,
   change: number,
 ): Promise<Decimal> {
-  const value = await costOf(em, item, Math.abs(change));
-  return change < 0 ? value.negated() : value;
+  return change < 0
+    ? (await costOfGoing(em, item, -change)).negated()
+    : costOfComing(em, item, change);
 }
 
 /** What the books said was on hand at an instant. */
@@ -264,19 +265,21 @@ async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalan
   return found ?? em.create(StockBalance, { ...keysOf(item), onHand: 0, reserved: 0 });
 }
 
-async function costOf(em: EntityManager, item: StockItem, quantity: number): Promise<Decimal> {
-  const { onHand } = await freeOf(em, item);
-  const { unitCost } = await describeItem(em, item);
-  return shareOfCost(quantity, { onHand, value: await valueOnHand(em, item), unitCost });
-}
-
-async function takenBy(em: EntityManager, item: StockItem, jobId: number): Promise<number> {
+/** What a job has taken and not brought back, and what that cost it. */
+async function takenBy(
+  em: EntityManager,
+  item: StockItem,
+  jobId: number,
+): Promise<{ taken: number; cost: Decimal }> {
   const moved = await em.find(StockMovement, {
     ...keysOf(item),
     jobId,
     kind: { $in: ['take', 'return'] },
   });
-  return moved.reduce((sum, movement) => sum - movement.quantity, 0);
+  return {
+    taken: moved.reduce((sum, movement) => sum - movement.quantity, 0),
+    cost: moved.reduce((sum, movement) => sum.minus(movement.value), new Decimal(0)),
+  };
 }
 
 async function tooLittle(work: Work, item: StockItem, asked: number, most: number) {

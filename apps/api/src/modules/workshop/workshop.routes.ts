@@ -14,6 +14,7 @@ import { moneyText, priceText } from '../../http/decimal-text.ts';
 import { invalid } from '../../http/problem.ts';
 import { serve } from '../../http/serve.ts';
 import { logDeed } from '../activity/activity-log.ts';
+import type { Work } from '../../work.ts';
 import { Workshop } from './workshop.entity.ts';
 
 export function workshopRoutes(context: Context): Router {
@@ -28,6 +29,7 @@ export function workshopRoutes(context: Context): Router {
     const workshop = await work.em.findOneOrFail(Workshop, 1);
     await requireVersion(work.em, { kind: 'workshop', id: 1, version: workshop.version }, ifMatch);
     requireKnownCurrency(body.currency);
+    await beginValuing(work, workshop, body.stockValue);
     assignDefined(workshop, decimalsOf(body));
     await work.em.flush();
     await logDeed(work, {
@@ -75,6 +77,19 @@ function decimalsOf(body: Typed) {
   return { ...(body as Omit<Typed, DecimalField>), ...decimals };
 }
 
+/** A new way of valuing holds for what moves from now on. */
+async function beginValuing(
+  { em }: Work,
+  workshop: Workshop,
+  chosen: Workshop['stockValue'] | undefined,
+): Promise<void> {
+  if (chosen === undefined || chosen === workshop.stockValue) return;
+  const [row] = await em.execute<[{ last: number }]>(
+    'SELECT COALESCE(MAX(id), 0) AS last FROM stock_movement',
+  );
+  workshop.stockValueAfter = row.last;
+}
+
 function requireKnownCurrency(code: string | undefined): void {
   if (code !== undefined && !currencies.some((currency) => currency.code === code)) {
     throw invalid([{ field: 'currency', message: 'Choose a currency from the list.' }]);
@@ -110,6 +125,7 @@ function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {
     setUpCharge: moneyText(workshop.setUpCharge),
     minimumOrder: moneyText(workshop.minimumOrder),
     priceRule: workshop.priceRule,
+    stockValue: workshop.stockValue,
     paymentTermDays: workshop.paymentTermDays,
     address: workshop.address,
     taxNumber: workshop.taxNumber,

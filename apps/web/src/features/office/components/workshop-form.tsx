@@ -30,6 +30,10 @@ const currencyChoices = currencies.map(({ code, name }) => ({
   value: code,
   label: `${code}, ${name}`,
 }));
+const stockValueChoices = [
+  { value: 'moving average', label: 'moving average: each purchase mixes into the cost' },
+  { value: 'first in first out', label: 'first in, first out: the oldest goes first' },
+];
 const timeZones = [...new Set(['UTC', ...Intl.supportedValuesOf('timeZone')])].map((zone) => ({
   value: zone,
   label: zone.replaceAll('_', ' '),
@@ -125,6 +129,14 @@ export function WorkshopForm({
       <NumberField name="paymentTermDays" label="Payment within" unit="days" />
       <TextField name="taxNumber" label="Tax number" short optional />
       <ChargesFields />
+      <Stitch />
+      <h2>Stock</h2>
+      <SelectField
+        name="stockValue"
+        label="Hardware and supplies are valued by"
+        help="A change holds for what moves from then on: what is there that day keeps its worth and goes first. A lot always stands at its own cost."
+        choices={stockValueChoices}
+      />
     </Form>
   );
 }
