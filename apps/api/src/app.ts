@@ -34,6 +34,7 @@ import { purchaseOrderRoutes } from './modules/purchase-orders/purchase-orders.r
 import { quoteRoutes } from './modules/quotes/quotes.routes.ts';
 import { scanRoutes } from './modules/scans/scans.routes.ts';
 import { searchRoutes } from './modules/search/search.routes.ts';
+import { stockLevelRoutes } from './modules/stock/stock-levels.routes.ts';
 import { stockRoutes } from './modules/stock/stock.routes.ts';
 import { supplierOfferRoutes } from './modules/supplier-offers/supplier-offers.routes.ts';
 import { supplierRoutes } from './modules/suppliers/suppliers.routes.ts';
@@ -78,6 +79,7 @@ const rooms: ((context: Context) => Router)[] = [
   supplierOfferRoutes,
   purchaseOrderRoutes,
   stockRoutes,
+  stockLevelRoutes,
   countRoutes,
   invoiceRoutes,
   taxRateRoutes,

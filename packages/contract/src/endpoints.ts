@@ -26,6 +26,7 @@ import * as quotes from './quotes.ts';
 import * as scans from './scans.ts';
 import * as search from './search.ts';
 import * as session from './session.ts';
+import * as stockLevels from './stock-levels.ts';
 import * as stock from './stock.ts';
 import * as supplierOffers from './supplier-offers.ts';
 import * as suppliers from './suppliers.ts';
@@ -75,6 +76,7 @@ const rooms: Record<string, unknown>[] = [
   supplierOffers,
   purchaseOrders,
   stock,
+  stockLevels,
   counts,
   invoices,
   taxRates,

@@ -34,6 +34,7 @@ export * from './quotes.ts';
 export * from './scans.ts';
 export * from './search.ts';
 export * from './session.ts';
+export * from './stock-levels.ts';
 export * from './stock.ts';
 export * from './supplier-offers.ts';
 export * from './suppliers.ts';

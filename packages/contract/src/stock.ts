@@ -41,7 +41,9 @@ export const stockMovement = z
     ...itemFields,
     /** Signed like the movement, at cost. */
     value: confidential(z.string()),
+    jobId: id.nullable(),
     jobNumber: z.string().nullable(),
+    purchaseOrderId: id.nullable(),
     purchaseOrderNumber: z.string().nullable(),
     reason: z.string(),
     actorName: z.string(),
@@ -57,13 +59,39 @@ export type StockReservation = z.infer<typeof stockReservation>;
 const everybody = ['owner', 'maker', 'bookkeeper'] as const;
 const idQuery = z.coerce.number().int().positive().optional();
 
+const spreadsheet = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
+
+/** Of everything, or of what is named. */
+const movementFilters = {
+  lotId: idQuery,
+  hardwareId: idQuery,
+  leatherId: idQuery,
+  jobId: idQuery,
+  orderId: idQuery,
+  kind: z.enum(movementKinds).optional(),
+  /** Who moved it, by a part of the name. */
+  person: z.string().trim().max(80).optional(),
+  from: day.optional(),
+  to: day.optional(),
+};
+
 export const listStockMovements = endpoint({
   method: 'GET',
   path: '/stock-movements',
-  summary: 'The stock ledger, newest first: of everything, one lot or one hardware',
+  summary: 'The stock ledger, newest first',
   access: everybody,
-  query: pageQuery.omit({ q: true }).extend({ lotId: idQuery, hardwareId: idQuery }),
+  query: pageQuery.omit({ q: true }).extend(movementFilters),
   reply: page(stockMovement),
+});
+
+export const readMovementsFile = endpoint({
+  method: 'GET',
+  path: '/stock-movements/file',
+  summary: 'Those movements as a spreadsheet, at most the newest 20,000',
+  access: everybody,
+  query: z.strictObject(movementFilters),
+  file: spreadsheet,
+  reply: z.unknown(),
 });
 
 export const listReservations = endpoint({

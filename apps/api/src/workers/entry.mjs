@@ -16,6 +16,11 @@ export async function searchSide(work) {
   return search(work);
 }
 
+export async function listSheet(sheet) {
+  const { drawListSheet } = await tsImport('../papers/list-sheet.ts', import.meta.url);
+  return drawListSheet(sheet);
+}
+
 export async function salesSheet(request) {
   const { salesSheet: work } = await tsImport('./sheet.ts', import.meta.url);
   return work(request);

@@ -8,6 +8,7 @@ import {
   type SideLayout,
 } from '@hidewright/domain';
 import { databaseFile, type Config } from '../config.ts';
+import type { ListSheet } from '../papers/list-sheet.ts';
 import type { LayoutAnswer, SideFound } from './layout.ts';
 import type { SheetRequest } from './sheet.ts';
 import { watched, type SearchWatch } from './watched.ts';
@@ -22,6 +23,8 @@ export interface Workers {
   searchSide(input: SideInput, watch: SearchWatch): Promise<SideFound>;
   /** The bytes of the sales sheet of a period. */
   salesSheet(period: Omit<SheetRequest, 'database'>): Promise<Uint8Array>;
+  /** The bytes of a list as a spreadsheet. */
+  listSheet(sheet: ListSheet): Promise<Uint8Array>;
   close(): Promise<void>;
 }
 
@@ -47,6 +50,7 @@ export function startWorkers(config: Config): Workers {
       ),
     salesSheet: (period) =>
       pool.run({ ...period, database }, { name: 'salesSheet' }) as Promise<Uint8Array>,
+    listSheet: (sheet) => pool.run(sheet, { name: 'listSheet' }) as Promise<Uint8Array>,
     close: () => pool.close(),
   };
 }

@@ -13,6 +13,15 @@ interface Asked {
   limit: number;
 }
 
+export interface AskedMovements extends Asked {
+  leatherId?: number | undefined;
+  orderId?: number | undefined;
+  kind?: StockMovement['kind'] | undefined;
+  person?: string | undefined;
+  from?: string | undefined;
+  to?: string | undefined;
+}
+
 interface ItemRow {
   id: number;
   lot_id: number | null;
@@ -27,7 +36,9 @@ interface MovementRow extends ItemRow {
   kind: StockMovement['kind'];
   quantity: number;
   value: number;
+  job_id: number | null;
   job_number: string | null;
+  purchase_order_id: number | null;
   purchase_order_number: string | null;
   reason: string;
   actor_name: string;
@@ -54,8 +65,19 @@ const conditionsOf = (asked: Asked) => [
 ];
 
 /** Movements of the ledger with every name in them, newest first. */
-export async function readMovements(em: EntityManager, asked: Asked): Promise<StockMovement[]> {
-  const { where, values } = whereAll(conditionsOf(asked));
+export async function readMovements(
+  em: EntityManager,
+  asked: AskedMovements,
+): Promise<StockMovement[]> {
+  const { where, values } = whereAll([
+    ...conditionsOf(asked),
+    ...when(asked.leatherId, 'lot.leather_id = ?'),
+    ...when(asked.orderId, 'job.order_id = ?'),
+    ...when(asked.kind, 'm.kind = ?'),
+    ...when(asked.person, 'm.actor_name LIKE ?', (person) => [`%${person}%`]),
+    ...when(asked.from, 'm.day >= ?'),
+    ...when(asked.to, 'm.day <= ?'),
+  ]);
   const rows = await em.execute<MovementRow[]>(
     `SELECT m.*, lot.tag AS lot_tag, h.name AS hardware_name, job.number AS job_number,
        p.number AS purchase_order_number
@@ -70,7 +92,9 @@ export async function readMovements(em: EntityManager, asked: Asked): Promise<St
     day: row.day,
     kind: row.kind,
     value: moneyText(unscaled(row.value, 2)),
+    jobId: row.job_id,
     jobNumber: row.job_number,
+    purchaseOrderId: row.purchase_order_id,
     purchaseOrderNumber: row.purchase_order_number,
     reason: row.reason,
     actorName: row.actor_name,

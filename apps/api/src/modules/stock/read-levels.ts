@@ -1,0 +1,111 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+import type { HardwareLevel, LeatherLevel, StockLevels } from '@hidewright/contract';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { when, whereAll } from '../../db/sql-conditions.ts';
+import { moneyText } from '../../http/decimal-text.ts';
+import { readStandings, type Standings } from './read-standings.ts';
+
+interface Asked {
+  /** The day whose end is meant. */
+  on: string;
+  /** Only then it is known what is held and promised. */
+  isToday: boolean;
+  hardwareId?: number | undefined;
+  leatherId?: number | undefined;
+}
+
+interface LotRow {
+  lot_id: number;
+  tag: string;
+  form: string;
+  place: string;
+  leather_id: number;
+  leather_name: string;
+  quantity: number;
+  value: number;
+}
+
+interface HardwareRow {
+  id: number;
+  name: string;
+  kind: HardwareLevel['kind'];
+  quantity: number;
+  value: number;
+}
+
+/** What the ledger says was there at the end of a day, and what it was worth; the place of a lot is where it lies now. */
+export async function readLevels(em: EntityManager, asked: Asked): Promise<StockLevels> {
+  const standings = asked.isToday ? await readStandings(em) : undefined;
+  const lots = asked.hardwareId === undefined ? await readLotRows(em, asked) : [];
+  const pieces = asked.leatherId === undefined ? await readHardwareRows(em, asked) : [];
+  const [leatherValue, hardwareValue] = [sumOf(lots, 'value'), sumOf(pieces, 'value')];
+  return {
+    on: asked.on,
+    leathers: leathersOf(lots, standings),
+    hardware: pieces.map((row) => ({
+      hardwareId: row.id,
+      name: row.name,
+      kind: row.kind,
+      quantity: row.quantity,
+      value: money(row.value),
+      standing: standings?.ofHardware(row.id) ?? null,
+    })),
+    leatherAreaMm2: area(sumOf(lots, 'quantity')),
+    leatherValue: money(leatherValue),
+    hardwareValue: money(hardwareValue),
+    value: money(leatherValue + hardwareValue),
+  };
+}
+
+const money = (hundredths: number): string => moneyText(unscaled(hundredths, 2));
+const area = (thousandths: number): string => unscaled(thousandths, 3).toFixed();
+
+const sumOf = (rows: readonly { quantity: number; value: number }[], of: 'quantity' | 'value') =>
+  rows.reduce((sum, row) => sum + row[of], 0);
+
+function readLotRows(em: EntityManager, { on, leatherId }: Asked): Promise<LotRow[]> {
+  const { where, values } = whereAll([
+    { sql: 'm.day <= ?', values: [on] },
+    ...when(leatherId, 'lot.leather_id = ?'),
+  ]);
+  return em.execute(
+    `SELECT lot.id AS lot_id, lot.tag, lot.form, lot.place, lot.leather_id, leather.name AS leather_name,
+       SUM(m.quantity) AS quantity, SUM(m.value) AS value
+     FROM stock_movement m JOIN lot ON lot.id = m.lot_id JOIN leather ON leather.id = lot.leather_id
+     ${where} GROUP BY lot.id HAVING SUM(m.quantity) <> 0 ORDER BY leather.name, lot.tag`,
+    values,
+  );
+}
+
+/** What is used up stays in the list: a nought is an answer too. */
+function readHardwareRows(em: EntityManager, { on, hardwareId }: Asked): Promise<HardwareRow[]> {
+  const { where, values } = whereAll(when(hardwareId, 'h.id = ?'));
+  return em.execute(
+    `SELECT h.id, h.name, h.kind, COALESCE(SUM(m.quantity), 0) AS quantity, COALESCE(SUM(m.value), 0) AS value
+     FROM hardware h LEFT JOIN stock_movement m ON m.hardware_id = h.id AND m.day <= ?
+     ${where} GROUP BY h.id HAVING h.active = 1 OR COALESCE(SUM(m.quantity), 0) <> 0 ORDER BY h.kind, h.name`,
+    [on, ...values],
+  );
+}
+
+function leathersOf(rows: readonly LotRow[], standings: Standings | undefined): LeatherLevel[] {
+  const byLeather = new Map<number, LotRow[]>();
+  for (const row of rows) {
+    byLeather.set(row.leather_id, [...(byLeather.get(row.leather_id) ?? []), row]);
+  }
+  return [...byLeather].map(([leatherId, lots]) => ({
+    leatherId,
+    name: lots[0]?.leather_name ?? '',
+    areaMm2: area(sumOf(lots, 'quantity')),
+    value: money(sumOf(lots, 'value')),
+    standing: standings?.ofLeather(leatherId) ?? null,
+    lots: lots.map((row) => ({
+      lotId: row.lot_id,
+      tag: row.tag,
+      form: row.form,
+      place: row.place,
+      areaMm2: area(row.quantity),
+      value: money(row.value),
+    })),
+  }));
+}

@@ -1,0 +1,93 @@
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { day, id } from './fields.ts';
+
+/** How it stands today beside what is there; none of an earlier day, since only what moved is kept. */
+const standing = z
+  .object({
+    /** On the shelf and held for jobs. */
+    reserved: z.string(),
+    free: z.string(),
+    /** Ordered from suppliers and not here yet. */
+    onOrder: z.string(),
+    /** What jobs need and the shelf does not hold for them: promised from what is still to come. */
+    promised: z.string(),
+  })
+  .meta({ id: 'StockStanding' });
+
+const lotLevel = z.object({
+  lotId: id,
+  tag: z.string(),
+  form: z.string(),
+  place: z.string(),
+  areaMm2: z.string(),
+  value: confidential(z.string()),
+});
+
+export const leatherLevel = z
+  .object({
+    leatherId: id,
+    name: z.string(),
+    areaMm2: z.string(),
+    value: confidential(z.string()),
+    /** Areas in mm². */
+    standing: standing.nullable(),
+    lots: z.array(lotLevel),
+  })
+  .meta({ id: 'LeatherLevel' });
+export type LeatherLevel = z.infer<typeof leatherLevel>;
+
+export const hardwareLevel = z
+  .object({
+    hardwareId: id,
+    name: z.string(),
+    kind: z.enum(['hardware', 'supplies']),
+    quantity: z.int(),
+    value: confidential(z.string()),
+    /** In pieces. */
+    standing: standing.nullable(),
+  })
+  .meta({ id: 'HardwareLevel' });
+export type HardwareLevel = z.infer<typeof hardwareLevel>;
+
+export const stockLevels = z
+  .object({
+    /** The end of this day. */
+    on: z.string(),
+    leathers: z.array(leatherLevel),
+    hardware: z.array(hardwareLevel),
+    leatherAreaMm2: z.string(),
+    leatherValue: confidential(z.string()),
+    hardwareValue: confidential(z.string()),
+    value: confidential(z.string()),
+  })
+  .meta({ id: 'StockLevels' });
+export type StockLevels = z.infer<typeof stockLevels>;
+
+const everybody = ['owner', 'maker', 'bookkeeper'] as const;
+const asked = z.strictObject({
+  /** Today, where it is left out. */
+  on: day.optional(),
+  hardwareId: z.coerce.number().int().positive().optional(),
+  leatherId: z.coerce.number().int().positive().optional(),
+});
+
+export const readStockLevels = endpoint({
+  method: 'GET',
+  path: '/stock-levels',
+  summary: 'What was on hand of everything at the end of a day, and what it was worth',
+  access: everybody,
+  query: asked,
+  reply: stockLevels,
+});
+
+export const readStockLevelsFile = endpoint({
+  method: 'GET',
+  path: '/stock-levels/file',
+  summary: 'The same as a spreadsheet',
+  access: everybody,
+  query: asked,
+  file: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet',
+  reply: z.unknown(),
+});
