@@ -39,6 +39,8 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'receive', path: '/stockroom/receive' },
     { name: 'scan', path: '/stockroom/scan' },
     { name: 'counts', path: '/stockroom/counts' },
+    { name: 'on-hand', path: '/stockroom/on-hand' },
+    { name: 'ledger', path: '/stockroom/ledger' },
     { name: 'invoices', path: '/books/invoices' },
     { name: 'office', path: '/office' },
     { name: 'people', path: '/office/people' },
@@ -56,6 +58,8 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'receive', path: '/stockroom/receive' },
     { name: 'scan', path: '/stockroom/scan' },
     { name: 'counts', path: '/stockroom/counts' },
+    { name: 'on-hand', path: '/stockroom/on-hand' },
+    { name: 'ledger', path: '/stockroom/ledger' },
   ],
   bookkeeper: [
     { name: 'quotes', path: '/counter/quotes' },

@@ -12,6 +12,16 @@ export const stockroomRoutes: RouteObject[] = [
     children: [
       { index: true, lazy: () => import('./stockroom/index.tsx') },
       {
+        path: 'ledger',
+        handle: { crumb: 'Ledger' },
+        lazy: () => import('./stockroom/ledger.tsx'),
+      },
+      {
+        path: 'on-hand',
+        handle: { crumb: 'On hand' },
+        lazy: () => import('./stockroom/on-hand.tsx'),
+      },
+      {
         path: 'counts',
         handle: { crumb: 'Counts' },
         children: [

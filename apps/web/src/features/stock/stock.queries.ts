@@ -1,12 +1,28 @@
-import { listReservations, listStockMovements } from '@hidewright/contract';
+import {
+  listReservations,
+  listStockMovements,
+  readStockLevels,
+  type QueryInputOf,
+} from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
 /** One lot, or one hardware. */
 export type Item = { lotId: number } | { hardwareId: number };
 
-/** The ledger of one item, newest first, page by page. */
-export function movementsQuery(item: Item) {
+/** Which movements: of one item, or of whatever is asked for. */
+export type Asked = Omit<QueryInputOf<typeof listStockMovements>, 'cursor' | 'limit'>;
+
+/** What there was at the end of a day; of one item, or of everything. */
+export function levelsQuery(asked: QueryInputOf<typeof readStockLevels>) {
+  return queryOptions({
+    queryKey: ['stock', 'levels', asked],
+    queryFn: ({ signal }) => call(readStockLevels, { query: asked, signal }),
+  });
+}
+
+/** The ledger, newest first, page by page. */
+export function movementsQuery(item: Asked) {
   return infiniteQueryOptions({
     queryKey: ['stock', 'movements', item],
     queryFn: ({ signal, pageParam }) =>

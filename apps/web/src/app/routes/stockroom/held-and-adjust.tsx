@@ -1,5 +1,6 @@
 import { Card } from '../../../components/card.tsx';
 import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
+import { StandingCard } from '../../../features/stock/components/standing-card.tsx';
 import { HeldList } from '../../../features/stock/components/held-list.tsx';
 
 interface HeldAndAdjustProps {
@@ -12,6 +13,7 @@ interface HeldAndAdjustProps {
 export function HeldAndAdjust({ item, handlesStock }: HeldAndAdjustProps) {
   return (
     <>
+      {'hardwareId' in item && <StandingCard hardwareId={item.hardwareId} />}
       <Card title="Held for jobs">
         <HeldList item={item} mayOpenJobs={handlesStock} />
       </Card>

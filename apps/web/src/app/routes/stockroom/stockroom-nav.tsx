@@ -6,6 +6,8 @@ const items: SectionLink[] = [
   { to: '/stockroom/hardware', word: 'Hardware and supplies' },
   { to: '/stockroom/suppliers', word: 'Suppliers' },
   { to: '/stockroom/purchase-orders', word: 'Purchase orders' },
+  { to: '/stockroom/on-hand', word: 'On hand' },
+  { to: '/stockroom/ledger', word: 'Ledger' },
   { to: '/stockroom/counts', word: 'Counts' },
   { to: '/stockroom/scan', word: 'Scan' },
 ];

@@ -5,12 +5,28 @@ import { Button } from '../../../components/button.tsx';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { instantText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { movementWords, signedText } from '../movement-words.ts';
-import { movementsQuery, type Item } from '../stock.queries.ts';
+import { movementsQuery, type Asked } from '../stock.queries.ts';
 
-function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMovement>[] {
+const itemColumn: Column<StockMovement> = {
+  id: 'item',
+  header: 'Of',
+  value: (row) => row.lotTag ?? row.hardwareName,
+  cell: (row) =>
+    row.lotId === null ? (
+      <TextLink to={`/stockroom/hardware/${row.hardwareId}`}>{row.hardwareName}</TextLink>
+    ) : (
+      <TextLink to={`/stockroom/lots/${row.lotId}`}>{row.lotTag}</TextLink>
+    ),
+};
+
+function columnsFor(
+  workshop: Workshop,
+  { withValues, mixed }: { withValues: boolean; mixed: boolean },
+): Column<StockMovement>[] {
   const { areaUnit, currency, timeZone } = workshop;
   const value: Column<StockMovement> = {
     id: 'value',
@@ -27,6 +43,7 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMoveme
       cell: (row) => instantText(row.at, timeZone),
       onPhone: 'title',
     },
+    ...(mixed ? [itemColumn] : []),
     { id: 'kind', header: 'What', value: (row) => movementWords[row.kind] },
     {
       id: 'quantity',
@@ -47,23 +64,35 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMoveme
   ];
 }
 
-/** The ledger of one lot or one hardware: nothing in it is ever changed. */
-export function MovementsTable({ item }: { item: Item }) {
+interface MovementsTableProps {
+  item: Asked;
+  /** Of more than one item: then each row says which. */
+  mixed?: boolean | undefined;
+  /** Where the list can be had as a spreadsheet. */
+  sheetAddress?: string | undefined;
+}
+
+/** The ledger of what is asked for: nothing in it is ever changed. */
+export function MovementsTable({ item, mixed = false, sheetAddress }: MovementsTableProps) {
   const workshop = useWorkshop();
   const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(
     movementsQuery(item),
   );
   const rows = useMemo(() => data?.pages.flatMap((page) => page.items) ?? [], [data]);
   const withValues = rows.some((row) => row.value !== undefined);
-  const columns = useMemo(() => columnsFor(workshop, withValues), [workshop, withValues]);
+  const columns = useMemo(
+    () => columnsFor(workshop, { withValues, mixed }),
+    [workshop, withValues, mixed],
+  );
   return (
     <DataTable
       label="Movements"
       rows={rows}
       rowId={(row) => row.id}
       columns={columns}
+      sheetAddress={sheetAddress}
       empty={
-        <EmptyState title="Nothing has moved yet.">
+        <EmptyState title={mixed ? 'Nothing like that has moved.' : 'Nothing has moved yet.'}>
           What comes in, is taken by a job or is counted is written here.
         </EmptyState>
       }

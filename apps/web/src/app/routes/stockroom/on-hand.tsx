@@ -1,0 +1,101 @@
+import { readStockLevelsFile } from '@hidewright/contract';
+import { useSuspenseQuery } from '@tanstack/react-query';
+import { useId } from 'react';
+import { useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
+import { buttonLook } from '../../../components/button-look.ts';
+import { Card } from '../../../components/card.tsx';
+import { InputFrame, inputLook } from '../../../components/input-frame.tsx';
+import { KeyFigures } from '../../../components/key-figures.tsx';
+import { PageHeader } from '../../../components/page-header.tsx';
+import { RouteError } from '../../../components/route-error.tsx';
+import {
+  HardwareLevels,
+  LeatherLevels,
+} from '../../../features/stock/components/levels-tables.tsx';
+import { levelsQuery } from '../../../features/stock/stock.queries.ts';
+import { addressOf } from '../../../lib/api.ts';
+import { areaText, moneyText } from '../../../lib/formatting.ts';
+import { queryClient } from '../../../lib/query-client.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { StockroomNav } from './stockroom-nav.tsx';
+
+const wanted = (search: URLSearchParams) => {
+  const on = search.get('on');
+  return on !== null && /^\d{4}-\d{2}-\d{2}$/.test(on) ? { on } : {};
+};
+
+export async function loader({ request }: LoaderFunctionArgs) {
+  await queryClient.ensureQueryData(levelsQuery(wanted(new URL(request.url).searchParams)));
+  return null;
+}
+
+export function Component() {
+  const [search, setSearch] = useSearchParams();
+  const asked = wanted(search);
+  const { data: levels } = useSuspenseQuery(levelsQuery(asked));
+  const { areaUnit, currency, today } = useWorkshop();
+  const id = useId();
+  const worth =
+    levels.value === undefined
+      ? []
+      : [
+          { word: `Leather, ${currency}`, figure: moneyText(levels.leatherValue ?? '0') },
+          { word: `Hardware, ${currency}`, figure: moneyText(levels.hardwareValue ?? '0') },
+          { word: `Together, ${currency}`, figure: moneyText(levels.value) },
+        ];
+  return (
+    <>
+      <PageHeader
+        title="On hand"
+        subtitle="What there was at the end of a day"
+        action={
+          <a
+            href={addressOf(readStockLevelsFile, { query: asked })}
+            download
+            className={buttonLook({})}
+          >
+            Spreadsheet
+          </a>
+        }
+      />
+      <StockroomNav />
+      <div className="mb-5">
+        <label htmlFor={id} className="mb-1 block font-semibold">
+          End of
+        </label>
+        <InputFrame id={id} invalid={false} short>
+          <input
+            id={id}
+            type="date"
+            max={today}
+            value={levels.on}
+            onChange={(event) => {
+              const { value } = event.target;
+              if (value !== '' && value <= today) setSearch(value === today ? {} : { on: value });
+            }}
+            className={inputLook}
+          />
+        </InputFrame>
+      </div>
+      <div className="grid gap-5">
+        <Card>
+          <KeyFigures
+            large
+            figures={[
+              { word: 'Leather', figure: areaText(levels.leatherAreaMm2, areaUnit, 1) },
+              ...worth,
+            ]}
+          />
+        </Card>
+        <Card title="Leather">
+          <LeatherLevels levels={levels} />
+        </Card>
+        <Card title="Hardware and supplies">
+          <HardwareLevels levels={levels} />
+        </Card>
+      </div>
+    </>
+  );
+}
+
+export const ErrorBoundary = RouteError;
