@@ -115,6 +115,10 @@ export * from './hardware/kit-prices.ts';
 export * from './hardware/count-by-weight.ts';
 export * from './hardware/post-fit.ts';
 
+export * from './buying/share-carriage.ts';
+export * from './buying/compare-area.ts';
+export * from './buying/line-progress.ts';
+
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';
 export * from './promise/bench-plan.ts';
