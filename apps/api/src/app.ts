@@ -33,10 +33,13 @@ import { pressRoutes } from './modules/presses/presses.routes.ts';
 import { purchaseOrderRoutes } from './modules/purchase-orders/purchase-orders.routes.ts';
 import { quoteRoutes } from './modules/quotes/quotes.routes.ts';
 import { scanRoutes } from './modules/scans/scans.routes.ts';
+import { receiptRoutes } from './modules/receipts/receipts.routes.ts';
 import { searchRoutes } from './modules/search/search.routes.ts';
 import { stockLevelRoutes } from './modules/stock/stock-levels.routes.ts';
 import { stockRoutes } from './modules/stock/stock.routes.ts';
 import { supplierOfferRoutes } from './modules/supplier-offers/supplier-offers.routes.ts';
+import { supplierClaimRoutes } from './modules/supplier-claims/supplier-claims.routes.ts';
+import { supplierReturnRoutes } from './modules/supplier-returns/supplier-returns.routes.ts';
 import { supplierRoutes } from './modules/suppliers/suppliers.routes.ts';
 import { taxRateRoutes } from './modules/tax-rates/tax-rates.routes.ts';
 import { timeReadingRoutes } from './modules/time-readings/time-readings.routes.ts';
@@ -78,6 +81,9 @@ const rooms: ((context: Context) => Router)[] = [
   supplierRoutes,
   supplierOfferRoutes,
   purchaseOrderRoutes,
+  receiptRoutes,
+  supplierClaimRoutes,
+  supplierReturnRoutes,
   stockRoutes,
   stockLevelRoutes,
   countRoutes,

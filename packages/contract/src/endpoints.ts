@@ -24,11 +24,14 @@ import * as presses from './presses.ts';
 import * as purchaseOrders from './purchase-orders.ts';
 import * as quotes from './quotes.ts';
 import * as scans from './scans.ts';
+import * as receipts from './receipts.ts';
 import * as search from './search.ts';
 import * as session from './session.ts';
 import * as stockLevels from './stock-levels.ts';
 import * as stock from './stock.ts';
 import * as supplierOffers from './supplier-offers.ts';
+import * as supplierClaims from './supplier-claims.ts';
+import * as supplierReturns from './supplier-returns.ts';
 import * as suppliers from './suppliers.ts';
 import * as system from './system.ts';
 import * as taxRates from './tax-rates.ts';
@@ -75,6 +78,9 @@ const rooms: Record<string, unknown>[] = [
   suppliers,
   supplierOffers,
   purchaseOrders,
+  receipts,
+  supplierClaims,
+  supplierReturns,
   stock,
   stockLevels,
   counts,

@@ -62,6 +62,9 @@ const typed = {
     .max(100, 'An order holds at most 100 lines. Make a second one.'),
 };
 
+/** Of leather an area, of hardware a count. */
+const goods = z.object({ areaMm2: z.string().nullable(), quantity: z.int().nullable() });
+
 export const purchaseLine = z
   .object({
     id,
@@ -76,9 +79,18 @@ export const purchaseLine = z
     /** Of hardware: what was ordered and what came. */
     quantity: z.int().nullable(),
     received: z.int().nullable(),
+    /** While the order is awaited; once it is closed, what is missing is short. */
+    toCome: goods,
+    over: goods,
+    short: goods,
+    /** The day on which the rest is awaited: its own, or the order's. */
+    expectedOn: z.string().nullable(),
     /** Per ft², or per piece. */
     unitPrice: confidential(z.string()),
     amount: confidential(z.string()),
+    /** What was paid for what came, and how much that is above its price on the order. */
+    paid: confidential(z.string()),
+    priceDifference: confidential(z.string()),
   })
   .meta({ id: 'PurchaseLine' });
 export type PurchaseLine = z.infer<typeof purchaseLine>;
@@ -96,6 +108,8 @@ export const purchaseOrder = z
     expectedOn: z.string().nullable(),
     note: z.string(),
     lines: z.array(purchaseLine),
+    /** How many deliveries of it have come. */
+    receipts: z.int(),
     total: confidential(z.string()),
     version,
   })
@@ -152,6 +166,16 @@ export const changePurchaseOrder = endpoint({
   reply: purchaseOrder,
 });
 
+export const purchaseOrderPaper = endpoint({
+  method: 'GET',
+  path: '/purchase-orders/{id}/paper',
+  summary: 'The order as PDF, as the supplier gets it; once sent, the very file that was sent',
+  access: ['owner', 'bookkeeper'],
+  params: idParams,
+  reply: z.unknown(),
+  file: 'application/pdf',
+});
+
 export const sendPurchaseOrder = endpoint({
   method: 'POST',
   path: '/purchase-orders/{id}/sendings',
@@ -171,5 +195,19 @@ export const cancelPurchaseOrder = endpoint({
   creates: true,
   params: idParams,
   body: z.strictObject({ reason: line(200, 'Say why, in a few words.') }),
+  reply: purchaseOrder,
+});
+
+export const changeAwaitedDay = endpoint({
+  method: 'PATCH',
+  path: '/purchase-orders/{id}/lines/{lineId}',
+  summary: 'Say when the rest of a line is awaited',
+  access: ['owner'],
+  edits: true,
+  params: z.strictObject({
+    id: z.coerce.number().int().positive(),
+    lineId: z.coerce.number().int().positive(),
+  }),
+  body: z.strictObject({ expectedOn: day }),
   reply: purchaseOrder,
 });

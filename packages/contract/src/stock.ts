@@ -1,23 +1,7 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import {
-  areaMm2,
-  choice,
-  count,
-  day,
-  id,
-  lengthMm,
-  line,
-  money,
-  optionalLine,
-  page,
-  pageQuery,
-  positiveCount,
-} from './fields.ts';
-import { hardware } from './hardware.ts';
-import { lot, lotForms } from './lots.ts';
-import { purchaseOrder } from './purchase-orders.ts';
+import { areaMm2, count, id, line, page, pageQuery } from './fields.ts';
 
 export const movementKinds = ['receive', 'take', 'return', 'reject', 'adjust', 'count'] as const;
 export type MovementKind = (typeof movementKinds)[number];
@@ -105,62 +89,7 @@ export const listReservations = endpoint({
   reply: page(stockReservation),
 });
 
-const aboveZero = (text: string) => Number(text) > 0;
 const fitsARack = (text: string) => Number(text) <= 9_290_304_000;
-const side = lengthMm.refine(aboveZero, 'Enter a length above zero, or leave it empty.');
-
-const receivedLot = z.strictObject({
-  leatherId: choice('Choose a leather.'),
-  purchaseLineId: id.nullable().default(null),
-  /** Left empty, the next number is drawn. */
-  tag: optionalLine(30).default(''),
-  form: z.enum(lotForms, 'Choose the form that it came in.'),
-  measuredAreaMm2: areaMm2
-    .refine(aboveZero, 'Enter the area as measured, above zero.')
-    .refine(fitsARack, 'That is more than a rack holds: enter at most 100,000 ft².'),
-  pieces: positiveCount.max(10_000, 'A bundle holds at most 10,000 pieces.').default(1),
-  widthMm: side.nullable().default(null),
-  heightMm: side.nullable().default(null),
-  /** The owner may type what it cost; otherwise the order's or the leather's price per ft² says it. */
-  cost: money.nullable().default(null),
-  grade: optionalLine(30).default(''),
-  shade: optionalLine(30).default(''),
-  place: optionalLine(60).default(''),
-  supplierLot: optionalLine(60).default(''),
-});
-export type ReceivedLot = z.output<typeof receivedLot>;
-
-const receivedHardware = z.strictObject({
-  hardwareId: choice('Choose hardware or supplies.'),
-  purchaseLineId: id.nullable().default(null),
-  quantity: positiveCount,
-  cost: money.nullable().default(null),
-});
-export type ReceivedHardware = z.output<typeof receivedHardware>;
-
-const tooMany = 'Receive at most 200 lines at a time.';
-
-export const receiveDelivery = endpoint({
-  method: 'POST',
-  path: '/receipts',
-  summary: 'Receive a delivery, for an order to a supplier or without one',
-  access: ['owner', 'maker'],
-  creates: true,
-  body: z.strictObject({
-    purchaseOrderId: id.nullable().default(null),
-    receivedOn: day.optional(),
-    lots: z.array(receivedLot).max(200, tooMany).default([]),
-    hardware: z.array(receivedHardware).max(200, tooMany).default([]),
-    /** What is still open of the order will not come. */
-    nothingMore: z.boolean().default(false),
-  }),
-  reply: z.object({
-    lots: z.array(lot),
-    hardware: z.array(hardware),
-    purchaseOrder: purchaseOrder.nullable(),
-  }),
-});
-
 const reason = line(200, 'Say why, in a few words, such as counted on the shelf.');
 
 export const adjustStock = endpoint({

@@ -69,6 +69,8 @@ const settings = {
   paymentTermDays: count.max(365, 'Enter at most 365 days.'),
   address: paragraph(400),
   taxNumber: optionalLine(40),
+  /** How far a side may miss the area marked on it before the receipt says so. */
+  areaTolerancePercent: percent,
 };
 
 export const workshop = z
@@ -104,6 +106,7 @@ export const workshop = z
     paymentTermDays: z.int(),
     address: z.string(),
     taxNumber: confidential(z.string()),
+    areaTolerancePercent: z.string(),
     mode: z.enum(['demo', 'shop']),
     /** Whether mail can leave; papers are handed over by hand while it cannot. */
     mailAvailable: z.boolean(),

@@ -32,10 +32,14 @@ import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts
 import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
 import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
 import { Quote } from '../modules/quotes/quote.entity.ts';
+import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
+import { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { Reservation } from '../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
 import { SupplierOffer } from '../modules/supplier-offers/supplier-offer.entity.ts';
+import { ClaimedLot } from '../modules/supplier-claims/claimed-lot.entity.ts';
+import { SupplierClaim } from '../modules/supplier-claims/supplier-claim.entity.ts';
 import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { TaxRate } from '../modules/tax-rates/tax-rate.entity.ts';
 import { TimeReading } from '../modules/time-readings/time-reading.entity.ts';
@@ -49,6 +53,7 @@ import { Counter } from './counter.entity.ts';
 export const entities = [
   Activity,
   BenchLog,
+  ClaimedLot,
   Counter,
   CountLine,
   StockCount,
@@ -80,6 +85,8 @@ export const entities = [
   PurchaseOrder,
   Quote,
   QuoteBreak,
+  Receipt,
+  ReceiptLine,
   Reservation,
   StandIn,
   StockBalance,
@@ -88,6 +95,7 @@ export const entities = [
   StoredLayout,
   Supplier,
   SupplierOffer,
+  SupplierClaim,
   TaxRate,
   TimeReading,
   Tool,

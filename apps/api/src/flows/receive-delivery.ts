@@ -1,72 +1,108 @@
 import { Decimal } from 'decimal.js';
-import type {
-  BodyOf,
-  ReceivedHardware,
-  receiveDelivery as endpoint,
-  ReceivedLot,
-  ReplyOf,
-} from '@hidewright/contract';
-import { assignDefined } from '../db/assign-defined.ts';
-import { scaled } from '../db/columns/scaled-decimal.ts';
+import type { BodyOf, receiveDelivery as endpoint, ReplyOf } from '@hidewright/contract';
 import { invalid, type FieldFault } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
-import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { readOneHardware } from '../modules/hardware/read-hardware.ts';
-import { Leather } from '../modules/leathers/leather.entity.ts';
-import { drawTag, requireFreeTag } from '../modules/lots/lot-tags.ts';
-import { Lot } from '../modules/lots/lot.entity.ts';
 import { readOneLot } from '../modules/lots/read-lots.ts';
-import { hardwareCost, leatherCost } from '../modules/purchase-orders/line-amount.ts';
 import { OpenDelivery } from '../modules/purchase-orders/open-delivery.ts';
 import { readOnePurchaseOrder } from '../modules/purchase-orders/read-purchase-orders.ts';
-import { receiveStock } from '../modules/stock/stock-ledger.ts';
+import { readOneReceipt } from '../modules/receipts/read-receipts.ts';
+import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
+import { Receipt } from '../modules/receipts/receipt.entity.ts';
+import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
+import { priceHardware, priceLot, withCarriage } from './receive/price-delivery.ts';
+import { putOnRack } from './receive/put-on-rack.ts';
 
 type Delivery = BodyOf<typeof endpoint>;
 
-interface Receipt {
-  lotIds: number[];
-  hardwareIds: number[];
+interface Received {
+  receiptId: number | null;
   purchaseOrderId: number | null;
 }
 
 /**
- * Takes in what a supplier brought: lots with their tags and measured areas, hardware by count, each at its cost. For
- * an order, its lines fill up and its state follows.
- * @throws {Problem} 409 when the order awaits nothing, 422 where what was typed cannot be
+ * Takes in what a supplier brought: lots with their tags and measured areas, hardware by count, each at what it cost
+ * with its share of freight and duty. For an order, its lines fill up and its state follows.
+ * @throws {Problem} 409 when the order awaits nothing or somebody was quicker, 422 where what was typed cannot be
  */
-export async function receiveDelivery(work: Work, asked: Delivery): Promise<Receipt> {
+export async function receiveDelivery(work: Work, asked: Delivery): Promise<Received> {
   requireSense(work, asked);
-  const delivery = await OpenDelivery.begin(work, asked.purchaseOrderId);
-  const receipt: Receipt = { lotIds: [], hardwareIds: [], purchaseOrderId: asked.purchaseOrderId };
-  for (const [at, typed] of asked.lots.entries()) {
-    const lot = await receiveLot(work, delivery, typed, {
-      field: `lots.${at}`,
-      on: asked.receivedOn ?? work.today,
+  const { purchaseOrderId, nothingMore } = asked;
+  const delivery = await OpenDelivery.begin(work, purchaseOrderId, asked.receiptsSeen);
+  const came = asked.lots.length + asked.hardware.length > 0;
+  const receiptId = came ? await takeIn(work, delivery, asked) : null;
+  await delivery.finish({ came, nothingMore });
+  return { receiptId, purchaseOrderId };
+}
+
+async function takeIn(work: Work, delivery: OpenDelivery, asked: Delivery): Promise<number> {
+  const receivedOn = asked.receivedOn ?? work.today;
+  const receipt = await writeReceipt(work, asked, receivedOn);
+  const priced = [];
+  for (const [at, typed] of asked.lots.entries())
+    priced.push(await priceLot(work, delivery, typed, `lots.${at}`));
+  for (const [at, typed] of asked.hardware.entries())
+    priced.push(await priceHardware(work, delivery, typed, `hardware.${at}`));
+  for (const [at, line] of withCarriage(priced, asked).entries()) {
+    const rack = { receivedOn, purchaseOrderId: asked.purchaseOrderId };
+    const { lotId, hardwareId, movementId } = await putOnRack(work, line, rack);
+    work.em.create(ReceiptLine, {
+      receiptId: receipt.id,
+      position: at + 1,
+      purchaseLineId: line.purchaseLineId,
+      lotId,
+      hardwareId,
+      quantity: line.quantity,
+      markedAreaMm2: line.markedAreaMm2,
+      batch: line.batch,
+      goods: line.goods,
+      carriage: line.carriage,
+      movementId,
     });
-    receipt.lotIds.push(lot.id);
   }
-  for (const [at, typed] of asked.hardware.entries()) {
-    await receiveHardware(work, delivery, typed, `hardware.${at}`);
-    receipt.hardwareIds.push(typed.hardwareId);
-  }
-  await delivery.finish(asked.nothingMore);
+  await work.em.flush();
+  await logDeed(work, {
+    action: `received a delivery of ${asked.lots.length} lots and ${asked.hardware.length} kinds of hardware`,
+    subjectKind: 'delivery',
+    subjectId: receipt.id,
+    detail: { purchaseOrderId: asked.purchaseOrderId },
+  });
+  return receipt.id;
+}
+
+async function writeReceipt(work: Work, asked: Delivery, receivedOn: string): Promise<Receipt> {
+  const workshop = await work.em.findOneOrFail(Workshop, 1);
+  const receipt = work.em.create(Receipt, {
+    purchaseOrderId: asked.purchaseOrderId,
+    receivedOn,
+    at: work.now.toISOString(),
+    freight: new Decimal(asked.freight),
+    duty: new Decimal(asked.duty),
+    sharedBy: asked.sharedBy,
+    tolerancePercent: workshop.areaTolerancePercent,
+    actorId: work.actor.id,
+    actorName: work.actor.name,
+  });
+  await work.em.flush();
   return receipt;
 }
 
-/** What a receipt made, as it now stands. */
+/** What a delivery made, as it now stands. */
 export async function describeReceipt(
   work: Work,
-  receipt: Receipt,
+  { receiptId, purchaseOrderId }: Received,
 ): Promise<ReplyOf<typeof endpoint>> {
-  const { lotIds, hardwareIds, purchaseOrderId } = receipt;
+  const receipt = receiptId === null ? null : await readOneReceipt(work.em, receiptId);
   const lots = [];
-  for (const id of lotIds) lots.push(await readOneLot(work.em, id));
+  for (const { lotId } of receipt?.lines ?? [])
+    if (lotId !== null) lots.push(await readOneLot(work.em, lotId));
+  const hardwareIds = new Set(receipt?.lines.flatMap((line) => line.hardwareId ?? []));
   const hardware = [];
-  for (const id of new Set(hardwareIds)) hardware.push(await readOneHardware(work.em, id));
+  for (const id of hardwareIds) hardware.push(await readOneHardware(work.em, id));
   const purchaseOrder =
     purchaseOrderId === null ? null : await readOnePurchaseOrder(work.em, purchaseOrderId);
-  return { lots, hardware, purchaseOrder };
+  return { receipt, lots, hardware, purchaseOrder };
 }
 
 function requireSense(work: Work, asked: Delivery): void {
@@ -78,7 +114,10 @@ function requireSense(work: Work, asked: Delivery): void {
   if (asked.receivedOn !== undefined && asked.receivedOn > work.today) {
     faults.push({ field: 'receivedOn', message: 'Choose today or an earlier day.' });
   }
-  if (work.actor.role === 'maker') faults.push(...typedCosts(asked));
+  if (empty) faults.push(...typedCarriage(asked, 'Add what came before its freight and duty.'));
+  if (work.actor.role === 'maker') {
+    faults.push(...typedCosts(asked), ...typedCarriage(asked, 'Leave the cost to the owner.'));
+  }
   if (faults.length > 0) throw invalid(faults);
 }
 
@@ -92,98 +131,8 @@ function typedCosts(asked: Delivery): FieldFault[] {
   );
 }
 
-async function receiveLot(
-  work: Work,
-  delivery: OpenDelivery,
-  typed: ReceivedLot,
-  { field, on }: { field: string; on: string },
-): Promise<Lot> {
-  const leather = await work.em.findOne(Leather, typed.leatherId);
-  if (leather === null)
-    throw invalid([{ field: `${field}.leatherId`, message: 'Choose a leather from the list.' }]);
-  const area = new Decimal(typed.measuredAreaMm2);
-  const line = delivery.fill(typed, scaled(area, 3), field);
-  const cost =
-    typed.cost === null
-      ? leatherCost(area, line?.unitPrice ?? leather.pricePerFt2, `${field}.cost`)
-      : new Decimal(typed.cost);
-  const lot = await hang(work, typed, { field, on, area, cost, purchaseLineId: line?.id ?? null });
-  await receiveStock(work, {
-    lotId: lot.id,
-    quantity: scaled(area, 3),
-    value: cost,
-    purchaseOrderId: delivery.orderId,
-  });
-  await logDeed(work, {
-    action: `received lot ${lot.tag} of ${leather.name}`,
-    subjectKind: 'lot',
-    subjectId: lot.id,
-    detail: { measuredAreaMm2: typed.measuredAreaMm2 },
-  });
-  return lot;
-}
-
-interface Hung {
-  field: string;
-  on: string;
-  area: Decimal;
-  cost: Decimal;
-  purchaseLineId: number | null;
-}
-
-/** The lot with its tag, before anything is on hand of it. */
-async function hang(
-  work: Work,
-  typed: ReceivedLot,
-  { field, on, area, cost, purchaseLineId }: Hung,
-): Promise<Lot> {
-  if (typed.tag !== '') await requireFreeTag(work.em, typed.tag, `${field}.tag`);
-  const { leatherId, form, pieces, grade, shade, place, supplierLot, widthMm, heightMm } = typed;
-  const lot = work.em.create(Lot, {
-    tag: typed.tag === '' ? await drawTag(work.em) : typed.tag,
-    leatherId,
-    form,
-    pieces,
-    measuredAreaMm2: area,
-    cost,
-    receivedOn: on,
-    purchaseLineId,
-  });
-  assignDefined(lot, { grade, shade, place, supplierLot });
-  if (widthMm !== null) lot.widthMm = new Decimal(widthMm);
-  if (heightMm !== null) lot.heightMm = new Decimal(heightMm);
-  await work.em.flush();
-  return lot;
-}
-
-async function receiveHardware(
-  work: Work,
-  delivery: OpenDelivery,
-  typed: ReceivedHardware,
-  field: string,
-): Promise<void> {
-  const hardware = await work.em.findOne(Hardware, typed.hardwareId);
-  if (hardware === null) {
-    throw invalid([
-      { field: `${field}.hardwareId`, message: 'Choose hardware or supplies from the list.' },
-    ]);
-  }
-  const { quantity } = typed;
-  const line = delivery.fill(typed, quantity, field);
-  const value =
-    typed.cost === null
-      ? hardwareCost(quantity, line?.unitPrice ?? hardware.unitPrice, `${field}.cost`)
-      : new Decimal(typed.cost);
-  await receiveStock(work, {
-    hardwareId: hardware.id,
-    quantity,
-    value,
-    purchaseOrderId: delivery.orderId,
-  });
-  await logDeed(work, {
-    action: `received ${quantity} × ${hardware.name}`,
-    subjectKind: 'hardware',
-    subjectId: hardware.id,
-    detail: { quantity },
-  });
+function typedCarriage(asked: Delivery, message: string): FieldFault[] {
+  return (['freight', 'duty'] as const)
+    .filter((field) => Number(asked[field]) > 0)
+    .map((field) => ({ field, message }));
 }

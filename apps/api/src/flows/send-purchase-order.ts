@@ -1,6 +1,7 @@
 import { addDays } from '@hidewright/domain';
 import { invalid, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
+import { noteFile, type KeptFile } from '../modules/files/stored-files.ts';
 import { enqueueMail } from '../modules/mail/outbox.ts';
 import { findPurchaseOrder } from '../modules/purchase-orders/draft-purchase-order.ts';
 import { purchaseOrderLetter } from '../modules/purchase-orders/purchase-order-letter.ts';
@@ -9,24 +10,30 @@ import { readOnePurchaseOrder } from '../modules/purchase-orders/read-purchase-o
 import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
+import type { PurchaseOrderOnPaper } from './put-purchase-order-on-paper.ts';
 
 /**
- * Sends a draft to its supplier, by e-mail or in the owner's own way; from now on it is awaited.
+ * Sends a draft to its supplier, by e-mail with its paper or in the owner's own way; from now on it is awaited, and
+ * the file that was sent stays.
  * @throws {Problem} 409 when it is no draft, 422 when it cannot go by e-mail
  */
 export async function sendPurchaseOrder(
   work: Work,
   asked: { id: number; by: 'mail' | 'hand'; mailIsSet: boolean },
+  drawn: PurchaseOrderOnPaper,
 ): Promise<void> {
   const order = await findPurchaseOrder(work, asked.id);
   if (order.state !== 'draft') throw notADraft(order);
+  requireSame(order, drawn);
   const supplier = await work.em.findOneOrFail(Supplier, order.supplierId);
   if (asked.by === 'mail') requireMail(supplier, asked.mailIsSet);
+  await noteFile(work, drawn.file);
   order.state = 'sent';
+  order.paperHash = drawn.file.hash;
   order.sentAt = work.now.toISOString();
   order.expectedOn ??= addDays(work.today, supplier.leadDays);
   await work.em.flush();
-  if (asked.by === 'mail') await mail(work, order, supplier);
+  if (asked.by === 'mail') await mail(work, order, { supplier, file: drawn.file });
   await logDeed(work, {
     action: `sent purchase order ${order.number} to ${supplier.name} ${asked.by === 'mail' ? 'by e-mail' : 'by hand'}`,
     subjectKind: 'purchase order',
@@ -54,12 +61,25 @@ function requireMail(supplier: Supplier, mailIsSet: boolean): void {
   throw invalid([{ field: 'by', message }]);
 }
 
-async function mail(work: Work, order: PurchaseOrder, supplier: Supplier): Promise<void> {
+function requireSame(order: PurchaseOrder, drawn: PurchaseOrderOnPaper): void {
+  if (order.version === drawn.version) return;
+  throw wrongState(
+    `${order.number} was changed while its paper was drawn. Look at it again, then send it.`,
+    ['send'],
+  );
+}
+
+async function mail(
+  work: Work,
+  order: PurchaseOrder,
+  { supplier, file }: { supplier: Supplier; file: KeptFile },
+): Promise<void> {
+  const { name, hash, type } = file;
   const workshop = await work.em.findOneOrFail(Workshop, 1);
   await enqueueMail(work, {
     recipient: supplier.email,
     ...purchaseOrderLetter(await readOnePurchaseOrder(work.em, order.id), workshop),
-    attachments: [],
+    attachments: [{ name, hash, type }],
     subjectKind: 'purchase order',
     subjectId: order.id,
   });

@@ -6,6 +6,7 @@ import { TheTools } from './migration-20261201-the-tools.ts';
 import { TheWorkings } from './migration-20261201-the-workings.ts';
 import { ThePhotos } from './migration-20261202-the-photos.ts';
 import { TheCounts } from './migration-20261203-the-counts.ts';
+import { TheDeliveries } from './migration-20261203-the-deliveries.ts';
 import { TheDesigns } from './migration-20261203-the-designs.ts';
 import { TheOffers } from './migration-20261203-the-offers.ts';
 
@@ -19,6 +20,7 @@ export const migrations = [
   { name: 'migration-20261201-the-workings', class: TheWorkings },
   { name: 'migration-20261202-the-photos', class: ThePhotos },
   { name: 'migration-20261203-the-counts', class: TheCounts },
+  { name: 'migration-20261203-the-deliveries', class: TheDeliveries },
   { name: 'migration-20261203-the-designs', class: TheDesigns },
   { name: 'migration-20261203-the-offers', class: TheOffers },
 ];

@@ -1,5 +1,6 @@
 import { drawInvoice } from './invoice-pdf.ts';
 import { drawLayout } from './layout-pdf.ts';
+import { drawPurchaseOrder } from './purchase-order-pdf.ts';
 import { drawQuote } from './quote-pdf.ts';
 import { drawTemplate } from './template-pdf.ts';
 
@@ -7,6 +8,7 @@ import { drawTemplate } from './template-pdf.ts';
 export const papers = {
   quote: drawQuote,
   invoice: drawInvoice,
+  purchaseOrder: drawPurchaseOrder,
   layout: drawLayout,
   template: drawTemplate,
 };

@@ -36,15 +36,6 @@ export const stockRules: Rule[] = [
     WHERE m.quantity IS NOT l.measured_area_mm2 OR m.value IS NOT l.cost`,
   ),
   none(
-    'An order line counts as received what was received on it',
-    `SELECT p.number || ' line ' || n.position || ' says ' || n.received || ' received, the ledger says ' || came AS fault
-    FROM (SELECT n.*, (SELECT COALESCE(SUM(m.quantity), 0) FROM stock_movement m LEFT JOIN lot l ON l.id = m.lot_id
-        WHERE m.kind = 'receive' AND m.purchase_order_id = n.purchase_order_id
-          AND (m.hardware_id = n.hardware_id OR l.purchase_line_id = n.id)) AS came FROM purchase_line n) n
-    JOIN purchase_order p ON p.id = n.purchase_order_id
-    WHERE came <> n.received`,
-  ),
-  none(
     'An approved count posted each of its differences, and no other sheet posted any',
     `SELECT c.title || ' line ' || l.id || ' differs by ' || COALESCE(l.counted - l.book, 0) || ', posted ' || COALESCE(m.quantity, 0) AS fault
     FROM count_line l JOIN stock_count c ON c.id = l.count_id LEFT JOIN stock_movement m ON m.id = l.movement_id

@@ -2,6 +2,7 @@ import { pathToFileURL } from 'node:url';
 import { knex } from '@mikro-orm/sqlite';
 import { databaseFile } from '../config.ts';
 import { bookRules } from './book-rules.ts';
+import { buyingRules } from './buying-rules.ts';
 import { fileRules } from './file-rules.ts';
 import { quoteRules } from './quote-rules.ts';
 import type { Query } from './rule.ts';
@@ -13,7 +14,14 @@ interface Verified {
   faults: string[];
 }
 
-const rules = [...fileRules, ...stockRules, ...quoteRules, ...workRules, ...bookRules];
+const rules = [
+  ...fileRules,
+  ...stockRules,
+  ...buyingRules,
+  ...quoteRules,
+  ...workRules,
+  ...bookRules,
+];
 
 /** Checks every rule on a read-only connection. */
 export async function verifyFolder(dataDir: string): Promise<Verified[]> {

@@ -4,6 +4,7 @@ import { logDeed } from '../activity/activity-log.ts';
 import { findPurchaseOrder } from './draft-purchase-order.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
+import { receivedMeanwhile } from './received-meanwhile.ts';
 
 type Came = { purchaseLineId: number | null } & ({ leatherId: number } | { hardwareId: number });
 
@@ -12,22 +13,41 @@ export class OpenDelivery {
   readonly #work: Work;
   readonly #order: PurchaseOrder | null;
   readonly #lines: PurchaseLine[];
+  /** Whether whoever receives has seen what came before. */
+  readonly #seen: boolean;
+  readonly #filled = new Set<number>();
 
-  private constructor(work: Work, order: PurchaseOrder | null, lines: PurchaseLine[]) {
+  private constructor(
+    work: Work,
+    order: PurchaseOrder | null,
+    lines: PurchaseLine[],
+    seen: boolean,
+  ) {
     this.#work = work;
     this.#order = order;
     this.#lines = lines;
+    this.#seen = seen;
   }
 
-  /** @throws {Problem} 404, or 409 when the order awaits no delivery */
-  static async begin(work: Work, orderId: number | null): Promise<OpenDelivery> {
-    if (orderId === null) return new OpenDelivery(work, null, []);
+  /**
+   * @param receiptsSeen how many deliveries had come when the order was looked at; null where nobody says
+   * @throws {Problem} 404, or 409 when the order awaits no delivery, or somebody else has received of it since
+   */
+  static async begin(
+    work: Work,
+    orderId: number | null,
+    receiptsSeen: number | null,
+  ): Promise<OpenDelivery> {
+    if (orderId === null) return new OpenDelivery(work, null, [], true);
     const order = await findPurchaseOrder(work, orderId);
+    if (receiptsSeen !== null && receiptsSeen !== order.receipts)
+      throw await receivedMeanwhile(work, order);
     if (order.state !== 'sent' && order.state !== 'part received') throw awaitsNothing(order);
     return new OpenDelivery(
       work,
       order,
       await work.em.find(PurchaseLine, { purchaseOrderId: orderId }),
+      receiptsSeen !== null,
     );
   }
 
@@ -36,8 +56,8 @@ export class OpenDelivery {
   }
 
   /**
-   * Counts what came towards the line that ordered it, if it names one. Hides are never as large as was ordered, so
-   * the last one may go beyond; pieces are counted out and may not.
+   * Counts what came towards the line that ordered it, if it names one. More than was ordered is received all the
+   * same and told as over; only a line that was complete already takes nothing from somebody who may not have seen it.
    */
   fill(came: Came, quantity: number, field: string): PurchaseLine | null {
     if (came.purchaseLineId === null) return null;
@@ -54,26 +74,23 @@ export class OpenDelivery {
         },
       ]);
     }
-    const open = line.quantity - line.received;
-    if (open <= 0) {
+    if (line.received >= line.quantity && !this.#filled.has(line.id) && !this.#seen) {
       throw wrongState(
         `Line ${line.position} of the order is complete. Receive what came beyond it without the order.`,
       );
     }
-    if (line.hardwareId !== null && quantity > open) {
-      const message = `${open} are still to come on this line. Receive what came beyond it without the order.`;
-      throw invalid([{ field: `${field}.quantity`, message }]);
-    }
     line.received += quantity;
+    this.#filled.add(line.id);
     return line;
   }
 
   /** The order's state follows what has come; `nothingMore` closes it although something is missing. */
-  async finish(nothingMore: boolean): Promise<void> {
+  async finish({ came, nothingMore }: { came: boolean; nothingMore: boolean }): Promise<void> {
     if (this.#order === null) return;
     const order = this.#order;
     const from = order.state;
     if (this.#lines.every((line) => line.received === 0)) throw nothingCame(order);
+    if (came) order.receipts += 1;
     const complete = this.#lines.every((line) => line.received >= line.quantity);
     order.state = complete || nothingMore ? 'received' : 'part received';
     await this.#work.em.flush();

@@ -29,6 +29,10 @@ export class PurchaseLine {
   @Property({ type: 'integer', columnType: 'integer' })
   received = 0;
 
+  /** When the rest of it is awaited, where that is another day than the order's. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  expectedOn: string | null = null;
+
   /** Per ft², or per piece. */
   @Property({ type: UnitPriceType, columnType: 'integer' })
   unitPrice!: Decimal;

@@ -3,7 +3,7 @@ import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 /** An order to a supplier. */
 @Entity({ tableName: 'purchase_order' })
 export class PurchaseOrder {
-  [OptionalProps]?: 'note' | 'version';
+  [OptionalProps]?: 'note' | 'receipts' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -25,6 +25,14 @@ export class PurchaseOrder {
 
   @Property({ type: 'text', columnType: 'text' })
   note = '';
+
+  /** How many deliveries came: each makes a new version of the order. */
+  @Property({ type: 'integer', columnType: 'integer' })
+  receipts = 0;
+
+  /** The file that its supplier got. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  paperHash: string | null = null;
 
   @Property({ type: 'text', columnType: 'text' })
   createdAt!: string;

@@ -2,24 +2,32 @@ import { Router } from 'express';
 import {
   addPurchaseOrder,
   cancelPurchaseOrder as cancelEndpoint,
+  changeAwaitedDay,
   changePurchaseOrder,
   listPurchaseOrders,
+  purchaseOrderPaper,
   readPurchaseOrder,
   sendPurchaseOrder as sendEndpoint,
   type QueryOf,
 } from '@hidewright/contract';
 import type { FilterQuery } from '@mikro-orm/core';
 import type { Context } from '../../context.ts';
+import {
+  putPurchaseOrderOnPaper,
+  type PurchaseOrderOnPaper,
+} from '../../flows/put-purchase-order-on-paper.ts';
 import { sendPurchaseOrder } from '../../flows/send-purchase-order.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
-import { serve } from '../../http/serve.ts';
+import { serve, serveFile } from '../../http/serve.ts';
+import { awaitLineOn } from './await-line-on.ts';
 import {
   cancelPurchaseOrder,
   changeDraft,
   draftPurchaseOrder,
   findPurchaseOrder,
 } from './draft-purchase-order.ts';
+import { paperOf } from './purchase-order-paper.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
 import { readOnePurchaseOrder, readPurchaseOrderList } from './read-purchase-orders.ts';
 
@@ -51,13 +59,33 @@ export function purchaseOrderRoutes(context: Context): Router {
     return readOnePurchaseOrder(work.em, order.id);
   });
 
-  serve(router, context, sendEndpoint, async (work, { params, body }) => {
-    await sendPurchaseOrder(work, {
-      id: params.id,
-      by: body.by,
-      mailIsSet: context.mailer.available,
-    });
-    return readOnePurchaseOrder(work.em, params.id);
+  serve(router, context, changeAwaitedDay, async (work, { params, body, ifMatch }) => {
+    const order = await findPurchaseOrder(work, params.id);
+    const { id, version } = order;
+    await requireVersion(work.em, { kind: 'purchase order', id, version }, ifMatch);
+    await awaitLineOn(work, order, { lineId: params.lineId, expectedOn: body.expectedOn });
+    return readOnePurchaseOrder(work.em, id);
+  });
+
+  serve(
+    router,
+    context,
+    sendEndpoint,
+    async (work, { params, body }, drawn: PurchaseOrderOnPaper) => {
+      const asked = { id: params.id, by: body.by, mailIsSet: context.mailer.available };
+      await sendPurchaseOrder(work, asked, drawn);
+      return readOnePurchaseOrder(work.em, params.id);
+    },
+    ({ params }, actor) => putPurchaseOrderOnPaper(context, actor, params.id),
+  );
+
+  serveFile(router, context, purchaseOrderPaper, async (work, { params }) => {
+    const order = await findPurchaseOrder(work, params.id);
+    const bytes =
+      order.paperHash === null
+        ? await context.papers.purchaseOrder(await paperOf(work, order))
+        : await context.files.read(order.paperHash);
+    return { name: `${order.number}.pdf`, type: 'application/pdf', bytes };
   });
 
   serve(router, context, cancelEndpoint, async (work, { params, body }) => {

@@ -126,6 +126,31 @@ describe('an order to a supplier', () => {
     expect(mail.body).toMatch(/1000 × Copper rivet \d+, at USD 0\.1625 each/);
   });
 
+  it('has its paper with it, and the file that was sent stays as it was', async () => {
+    const order = await draft();
+    const paper = (role: 'owner' | 'bookkeeper' | 'maker' = 'owner') =>
+      shop.as(role).get(`/api/purchase-orders/${order.id}/paper`).buffer();
+    const before = await paper().expect(200).expect('Content-Type', 'application/pdf');
+    expect(before.body.subarray(0, 5).toString()).toBe('%PDF-');
+    await send(order.id, 'mail').expect(201);
+    const mail = await shop.context.orm.em
+      .fork()
+      .findOneOrFail(OutgoingMail, { subjectKind: 'purchase order', subjectId: order.id });
+    expect(mail.attachments).toMatchObject([
+      { name: `${order.number}.pdf`, type: 'application/pdf' },
+    ]);
+    const sent = await shop.context.files.read(mail.attachments[0]?.hash ?? '');
+    const workshop = await owner().get('/api/workshop').expect(200);
+    await owner()
+      .patch('/api/workshop')
+      .set('If-Match', `"${workshop.body.version}"`)
+      .send({ name: 'Another name' })
+      .expect(200);
+    const after = await paper('bookkeeper').expect(200);
+    expect(after.body.equals(sent)).toBe(true);
+    await paper('maker').expect(403);
+  });
+
   it('does not go by e-mail to a supplier without an address', async () => {
     const supplier = await owner()
       .post('/api/suppliers')

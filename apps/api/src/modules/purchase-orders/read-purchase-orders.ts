@@ -8,8 +8,10 @@ import { notFound } from '../../http/problem.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
+import { lineProgress } from '@hidewright/domain';
 import { lineAmount } from './line-amount.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
+import { paidOf, readPaid, type Paid } from './paid-for-lines.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
 
 /** Orders with their lines and every name in them, newest first. */
@@ -25,10 +27,11 @@ export async function readPurchaseOrderList(
     { orderBy: { position: 'asc' } },
   );
   const names = await readNames(em, lines);
+  const paid = await readPaid(em, lines);
   const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
   return orders.map((order) => {
     const own = lines.filter((line) => line.purchaseOrderId === order.id);
-    return toReply(order, suppliers.get(order.supplierId), own, names);
+    return toReply(order, suppliers.get(order.supplierId), own, { names, paid });
   });
 }
 
@@ -56,11 +59,16 @@ async function byId<T extends { id: number }>(rows: Promise<T[]>): Promise<Map<n
   return new Map((await rows).map((row) => [row.id, row]));
 }
 
+interface Known {
+  names: Names;
+  paid: Paid;
+}
+
 function toReply(
   order: PurchaseOrder,
   supplier: Supplier | undefined,
   lines: PurchaseLine[],
-  names: Names,
+  known: Known,
 ): OrderReply {
   return {
     id: order.id,
@@ -73,16 +81,19 @@ function toReply(
     sentAt: order.sentAt,
     expectedOn: order.expectedOn,
     note: order.note,
-    lines: lines.map((line) => toLine(line, names)),
+    lines: lines.map((line) => toLine(line, order, known)),
+    receipts: order.receipts,
     total: moneyText(lines.reduce((sum, line) => sum.plus(lineAmount(line)), new Decimal(0))),
     version: order.version,
   };
 }
 
-function toLine(line: PurchaseLine, names: Names): LineReply {
+function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known): LineReply {
   const ofLeather = line.leatherId !== null;
   const area = (thousandths: number) => (ofLeather ? unscaled(thousandths, 3).toFixed() : null);
   const pieces = (quantity: number) => (ofLeather ? null : quantity);
+  const goods = (quantity: number) => ({ areaMm2: area(quantity), quantity: pieces(quantity) });
+  const { toCome, over, short } = progressOf(line, order);
   return {
     id: line.id,
     position: line.position,
@@ -97,7 +108,18 @@ function toLine(line: PurchaseLine, names: Names): LineReply {
     receivedAreaMm2: area(line.received),
     quantity: pieces(line.quantity),
     received: pieces(line.received),
+    toCome: goods(toCome),
+    over: goods(over),
+    short: goods(short),
+    expectedOn: line.expectedOn ?? order.expectedOn,
     unitPrice: priceText(line.unitPrice),
     amount: moneyText(lineAmount(line)),
+    ...paidOf(paid, line),
   };
+}
+
+/** A draft awaits all of itself; of a cancelled order nothing is missing. */
+function progressOf({ quantity, received }: PurchaseLine, { state }: PurchaseOrder) {
+  const ordered = state === 'cancelled' ? received : quantity;
+  return lineProgress({ ordered, received }, state !== 'received');
 }

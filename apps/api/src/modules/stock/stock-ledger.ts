@@ -128,6 +128,39 @@ export async function returnStock(
   return move(work, asked, { kind: 'return', quantity, value, jobId, reason });
 }
 
+/** Takes a receipt out of the books again, so that it can be written at another cost: both rows stay. */
+export async function undoReceipt(
+  work: Work,
+  received: Received & StockItem,
+): Promise<StockMovement> {
+  requireQuantity(received.quantity);
+  const { quantity, value, purchaseOrderId = null, reason = '' } = received;
+  const back = { quantity: -quantity, value: value.negated() };
+  return move(work, received, { kind: 'receive', ...back, purchaseOrderId, reason });
+}
+
+/**
+ * Takes off the rack what goes back to its supplier, at what it stands at.
+ * @throws {Problem} 409 naming what is free, and what jobs hold, when it is less
+ */
+export async function rejectStock(
+  work: Work,
+  asked: { quantity: number; purchaseOrderId: number; reason: string } & StockItem,
+): Promise<StockMovement> {
+  const { quantity, purchaseOrderId, reason } = asked;
+  requireQuantity(quantity);
+  const { free, reserved } = await freeOf(work.em, asked);
+  if (quantity > free) {
+    const { name, say } = await describeItem(work.em, asked);
+    throw wrongState(
+      `Of ${name} ${say(free)} is free and ${say(reserved)} is held for jobs, so ${say(quantity)} cannot go back. Send back less, or let the jobs go first.`,
+      free > 0 ? [`send back up to ${say(free)}`] : [],
+    );
+  }
+  const value = (await costOf(work.em, asked, quantity)).negated();
+  return move(work, asked, { kind: 'reject', quantity: -quantity, value, purchaseOrderId, reason });
+}
+
 /**
  * Sets what is on hand to what was counted. A count that agrees moves nothing; one that leaves less than is held for
  * jobs names the reservations that now stand on too little.

@@ -1,13 +1,7 @@
 import { Router } from 'express';
-import {
-  adjustStock,
-  listReservations,
-  listStockMovements,
-  receiveDelivery as receiveEndpoint,
-} from '@hidewright/contract';
+import { adjustStock, listReservations, listStockMovements } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { adjustToCount } from '../../flows/adjust-stock.ts';
-import { describeReceipt, receiveDelivery } from '../../flows/receive-delivery.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
 import { readMovements, readReservations } from './read-ledger.ts';
@@ -34,10 +28,6 @@ export function stockRoutes(context: Context): Router {
     });
     return toPage(rows, limit, (row) => row.id);
   });
-
-  serve(router, context, receiveEndpoint, async (work, { body }) =>
-    describeReceipt(work, await receiveDelivery(work, body)),
-  );
 
   serve(router, context, adjustStock, async (work, { body }) => adjustToCount(work, body));
 

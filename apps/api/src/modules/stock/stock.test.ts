@@ -186,18 +186,21 @@ describe('receiving for an order', () => {
     expect((await counts()).onHand).toBe(1000);
   });
 
-  it('takes no more pieces than a line still awaits, and none on a line that is complete', async () => {
+  it('receives what came beyond the order and says how much, but nothing unseen on a line that is complete', async () => {
     const order = await orderMore(shop, things);
     const on = (quantity: number) =>
       receive({
         purchaseOrderId: order.id,
         hardware: [rivets(quantity, { purchaseLineId: order.rivetLine })],
       });
-    const beyond = await on(1001).expect(422);
-    expect(beyond.body.errors).toMatchObject([{ field: 'hardware.0.quantity' }]);
-    await on(1000).expect(201);
+    const beyond = await on(1012).expect(201);
+    expect(beyond.body.purchaseOrder.lines[1]).toMatchObject({
+      received: 1012,
+      over: { quantity: 12, areaMm2: null },
+      toCome: { quantity: 0 },
+    });
     await on(1).expect(409);
-    expect((await counts()).onHand).toBe(1000);
+    expect((await counts()).onHand).toBe(1012);
   });
 
   it('refuses a line that belongs to something else', async () => {

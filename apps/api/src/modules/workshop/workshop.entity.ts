@@ -35,6 +35,7 @@ export class Workshop {
     | 'stockValueAfter'
     | 'address'
     | 'taxNumber'
+    | 'areaTolerancePercent'
     | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
@@ -147,6 +148,10 @@ export class Workshop {
 
   @Property({ type: 'text', columnType: 'text' })
   taxNumber = '';
+
+  /** How far a side may miss the area marked on it. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  areaTolerancePercent: Decimal = new Decimal(3);
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;

@@ -63,6 +63,7 @@ const decimalFields = [
   'cardFeeEach',
   'setUpCharge',
   'minimumOrder',
+  'areaTolerancePercent',
 ] as const;
 type DecimalField = (typeof decimalFields)[number];
 
@@ -129,6 +130,7 @@ function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {
     paymentTermDays: workshop.paymentTermDays,
     address: workshop.address,
     taxNumber: workshop.taxNumber,
+    areaTolerancePercent: workshop.areaTolerancePercent.toString(),
     mode: workshop.mode,
     mailAvailable,
     version: workshop.version,

@@ -1,4 +1,5 @@
 import { convert } from '@hidewright/domain';
+import { putPurchaseOrderOnPaper } from '../../flows/put-purchase-order-on-paper.ts';
 import { receiveDelivery } from '../../flows/receive-delivery.ts';
 import { sendPurchaseOrder } from '../../flows/send-purchase-order.ts';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
@@ -32,22 +33,25 @@ export function planPurchases(shop: DemoShop, year: Year, furnished: Furnished):
   });
 }
 
-function order(
+async function order(
   shop: DemoShop,
   furnished: Furnished,
   purchase: Purchase,
   expectedOn: string,
 ): Promise<number> {
-  return shop.as('owner', async (work) => {
+  const id = await shop.as('owner', async (work) => {
     const supplierId = furnished.suppliers.id(purchase.supplier);
     const lines = [
       ...(await leatherLines(work, furnished, purchase)),
       ...(await hardwareLines(work, furnished, purchase)),
     ];
-    const { id } = await draftPurchaseOrder(work, { supplierId, expectedOn, note: '', lines });
-    await sendPurchaseOrder(work, { id, by: 'mail', mailIsSet: true });
-    return id;
+    return (await draftPurchaseOrder(work, { supplierId, expectedOn, note: '', lines })).id;
   });
+  const drawn = await putPurchaseOrderOnPaper(shop.context, shop.person('owner'), id);
+  await shop.as('owner', (work) =>
+    sendPurchaseOrder(work, { id, by: 'mail', mailIsSet: true }, drawn),
+  );
+  return id;
 }
 
 async function leatherLines({ em }: Work, furnished: Furnished, { leather = [] }: Purchase) {
@@ -93,19 +97,24 @@ async function receive(
   const hardware = (purchase.hardware ?? []).map(({ name, quantity }) => {
     const hardwareId = furnished.hardware.id(name);
     const purchaseLineId = open.find((line) => line.hardwareId === hardwareId)?.id ?? null;
-    return { hardwareId, purchaseLineId, quantity, cost: null };
+    return { hardwareId, purchaseLineId, quantity, batch: '', cost: null };
   });
   await receiveDelivery(work, {
     purchaseOrderId,
     receivedOn: work.today,
     lots,
     hardware,
+    receiptsSeen: null,
+    freight: '0.00',
+    duty: '0.00',
+    sharedBy: 'value',
     nothingMore: false,
   });
 }
 
 const blankLot = {
   tag: '',
+  markedAreaMm2: null,
   pieces: 1,
   widthMm: null,
   heightMm: null,

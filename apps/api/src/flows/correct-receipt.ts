@@ -1,0 +1,108 @@
+import { Decimal } from 'decimal.js';
+import type { BodyOf, changeReceipt } from '@hidewright/contract';
+import { unscaled } from '../db/columns/scaled-decimal.ts';
+import { moneyText } from '../http/decimal-text.ts';
+import { invalid, wrongState } from '../http/problem.ts';
+import { logDeed } from '../modules/activity/activity-log.ts';
+import { findLot } from '../modules/lots/find-lot.ts';
+import { readOneReceipt } from '../modules/receipts/read-receipts.ts';
+import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
+import { Receipt } from '../modules/receipts/receipt.entity.ts';
+import { receiveStock, undoReceipt } from '../modules/stock/stock-ledger.ts';
+import type { Work } from '../work.ts';
+import { carriageOf } from './receive/price-delivery.ts';
+import { batchWords } from './receive/put-on-rack.ts';
+
+type Correction = BodyOf<typeof changeReceipt>;
+
+/**
+ * Puts right what a delivery cost, once its papers are there: freight, duty, and what was paid for the goods. What it
+ * put into the ledger is taken out and written again, so that both can be read there; what was used since keeps its
+ * cost, and so a delivery of which something has moved stays as it is.
+ * @throws {Problem} 409 when something of it has moved
+ */
+export async function correctReceipt(
+  work: Work,
+  receipt: Receipt,
+  typed: Correction,
+): Promise<void> {
+  await requireUntouched(work, receipt);
+  const readVersion = receipt.version;
+  const lines = await work.em.find(
+    ReceiptLine,
+    { receiptId: receipt.id },
+    { orderBy: { position: 'asc' } },
+  );
+  for (const line of [...lines].reverse()) await takeOut(work, receipt, line);
+  for (const { receiptLineId, goods } of typed.goods ?? [])
+    lineOf(lines, receiptLineId).goods = new Decimal(goods);
+  if (typed.freight !== undefined) receipt.freight = new Decimal(typed.freight);
+  if (typed.duty !== undefined) receipt.duty = new Decimal(typed.duty);
+  if (typed.sharedBy !== undefined) receipt.sharedBy = typed.sharedBy;
+  shareOut(receipt, lines);
+  for (const line of lines) await putBack(work, receipt, line);
+  await raiseVersion(work, receipt, readVersion);
+  await logDeed(work, {
+    action: `put right what the delivery of ${receipt.receivedOn} cost`,
+    subjectKind: 'delivery',
+    subjectId: receipt.id,
+    detail: { changed: Object.keys(typed) },
+  });
+}
+
+async function requireUntouched(work: Work, receipt: Receipt): Promise<void> {
+  const { untouched } = await readOneReceipt(work.em, receipt.id);
+  if (untouched) return;
+  throw wrongState(
+    'Something of this delivery, or more of the same hardware, has moved since, so what it cost stays as it is.',
+  );
+}
+
+function lineOf(lines: ReceiptLine[], id: number): ReceiptLine {
+  const line = lines.find((each) => each.id === id);
+  if (line !== undefined) return line;
+  throw invalid([{ field: 'goods', message: 'Choose lines of this delivery.' }]);
+}
+
+const itemOf = ({ lotId, hardwareId }: ReceiptLine) =>
+  lotId === null ? { hardwareId: hardwareId ?? 0 } : { lotId };
+
+async function takeOut(work: Work, { purchaseOrderId }: Receipt, line: ReceiptLine) {
+  const value = line.goods.plus(line.carriage);
+  const reason = 'to be written again at another cost';
+  const { quantity } = line;
+  await undoReceipt(work, { ...itemOf(line), quantity, value, purchaseOrderId, reason });
+}
+
+function shareOut(receipt: Receipt, lines: ReceiptLine[]): void {
+  const carried = lines.map(({ goods, lotId, quantity }) => ({
+    goods: moneyText(goods),
+    areaMm2: lotId === null ? null : unscaled(quantity, 3).toFixed(),
+    quantity: lotId === null ? quantity : null,
+  }));
+  const shares = carriageOf(carried, {
+    freight: moneyText(receipt.freight),
+    duty: moneyText(receipt.duty),
+    sharedBy: receipt.sharedBy,
+  });
+  lines.forEach((line, at) => {
+    line.carriage = shares[at] ?? new Decimal(0);
+  });
+}
+
+async function putBack(work: Work, { purchaseOrderId }: Receipt, line: ReceiptLine) {
+  const value = line.goods.plus(line.carriage);
+  const reason = [batchWords(line.batch), 'cost put right'].filter(Boolean).join(', ');
+  const { quantity } = line;
+  if (line.lotId !== null) (await findLot(work.em, line.lotId)).cost = value;
+  const put = { ...itemOf(line), quantity, value, purchaseOrderId, reason };
+  line.movementId = (await receiveStock(work, put)).id;
+}
+
+/** Also where only the cost of goods was typed, which stands on the lines. */
+async function raiseVersion(work: Work, receipt: Receipt, readVersion: number): Promise<void> {
+  await work.em.flush();
+  if (receipt.version > readVersion) return;
+  await work.em.nativeUpdate(Receipt, { id: receipt.id }, { sharedBy: receipt.sharedBy });
+  await work.em.refresh(receipt);
+}

@@ -1,0 +1,105 @@
+import { Decimal } from 'decimal.js';
+import type { ReceivedHardware, ReceivedLot } from '@hidewright/contract';
+import { shareCarriage, type CarriageBasis, type CarriedLine } from '@hidewright/domain';
+import { scaled } from '../../db/columns/scaled-decimal.ts';
+import { moneyText } from '../../http/decimal-text.ts';
+import { invalid } from '../../http/problem.ts';
+import { Hardware } from '../../modules/hardware/hardware.entity.ts';
+import { Leather } from '../../modules/leathers/leather.entity.ts';
+import { hardwareCost, leatherCost } from '../../modules/purchase-orders/line-amount.ts';
+import type { OpenDelivery } from '../../modules/purchase-orders/open-delivery.ts';
+import type { Work } from '../../work.ts';
+
+interface Priced {
+  field: string;
+  purchaseLineId: number | null;
+  /** Thousandths of mm² as measured, or pieces. */
+  quantity: number;
+  markedAreaMm2: Decimal | null;
+  batch: string;
+  /** What the goods cost. */
+  goods: Decimal;
+}
+
+/** A line of a delivery: what came, at what it costs. */
+export type PricedLine = Priced &
+  ({ of: 'lot'; typed: ReceivedLot; leather: Leather } | { of: 'hardware'; hardware: Hardware });
+/** With its share of freight and duty. */
+export type LandedLine = PricedLine & { carriage: Decimal };
+
+/** A lot as it came: what is marked on it is paid for, and what is measured goes on the rack. */
+export async function priceLot(
+  work: Work,
+  delivery: OpenDelivery,
+  typed: ReceivedLot,
+  field: string,
+): Promise<PricedLine> {
+  const leather = await work.em.findOne(Leather, typed.leatherId);
+  if (leather === null)
+    throw invalid([{ field: `${field}.leatherId`, message: 'Choose a leather from the list.' }]);
+  const quantity = scaled(new Decimal(typed.measuredAreaMm2), 3);
+  const line = delivery.fill(typed, quantity, field);
+  const paidFor = new Decimal(typed.markedAreaMm2 ?? typed.measuredAreaMm2);
+  const goods =
+    typed.cost === null
+      ? leatherCost(paidFor, line?.unitPrice ?? leather.pricePerFt2, `${field}.cost`)
+      : new Decimal(typed.cost);
+  const markedAreaMm2 = typed.markedAreaMm2 === null ? null : new Decimal(typed.markedAreaMm2);
+  const purchaseLineId = line?.id ?? null;
+  const priced = { field, purchaseLineId, quantity, markedAreaMm2, batch: '', goods };
+  return { of: 'lot', typed, leather, ...priced };
+}
+
+export async function priceHardware(
+  work: Work,
+  delivery: OpenDelivery,
+  typed: ReceivedHardware,
+  field: string,
+): Promise<PricedLine> {
+  const hardware = await work.em.findOne(Hardware, typed.hardwareId);
+  if (hardware === null) {
+    throw invalid([
+      { field: `${field}.hardwareId`, message: 'Choose hardware or supplies from the list.' },
+    ]);
+  }
+  const { quantity, batch } = typed;
+  const line = delivery.fill(typed, quantity, field);
+  const goods =
+    typed.cost === null
+      ? hardwareCost(quantity, line?.unitPrice ?? hardware.unitPrice, `${field}.cost`)
+      : new Decimal(typed.cost);
+  const purchaseLineId = line?.id ?? null;
+  const priced = { field, purchaseLineId, quantity, markedAreaMm2: null, batch, goods };
+  return { of: 'hardware', hardware, ...priced };
+}
+
+interface Carriage {
+  freight: string;
+  duty: string;
+  sharedBy: CarriageBasis;
+}
+
+/**
+ * What each line bears of freight and duty: both are shared out by themselves, so that either sums to what was typed.
+ * @throws {InvalidInput} where nothing that came can bear them
+ */
+export function carriageOf(
+  lines: readonly CarriedLine[],
+  { freight, duty, sharedBy }: Carriage,
+): Decimal[] {
+  const shares = [freight, duty].map((amount) => shareCarriage(amount, lines, sharedBy));
+  return lines.map((_, at) =>
+    shares.reduce((sum, parts) => sum.plus(parts[at] ?? 0), new Decimal(0)),
+  );
+}
+
+/** The lines with what each bears of freight and duty. */
+export function withCarriage(lines: PricedLine[], carriage: Carriage): LandedLine[] {
+  const carried = lines.map((line) => ({
+    goods: moneyText(line.goods),
+    areaMm2: line.of === 'lot' ? line.typed.measuredAreaMm2 : null,
+    quantity: line.of === 'lot' ? null : line.quantity,
+  }));
+  const shares = carriageOf(carried, carriage);
+  return lines.map((line, at) => ({ ...line, carriage: shares[at] ?? new Decimal(0) }));
+}

@@ -1,0 +1,83 @@
+import { Decimal } from 'decimal.js';
+import { assignDefined } from '../../db/assign-defined.ts';
+import { logDeed } from '../../modules/activity/activity-log.ts';
+import { drawTag, requireFreeTag } from '../../modules/lots/lot-tags.ts';
+import { Lot } from '../../modules/lots/lot.entity.ts';
+import { receiveStock } from '../../modules/stock/stock-ledger.ts';
+import type { Work } from '../../work.ts';
+import type { LandedLine } from './price-delivery.ts';
+
+interface Rack {
+  receivedOn: string;
+  purchaseOrderId: number | null;
+}
+
+interface OnRack {
+  lotId: number | null;
+  hardwareId: number | null;
+  movementId: number;
+}
+
+/** Writes a line of a delivery into the stock ledger, a lot with its tag; its value bears freight and duty. */
+export async function putOnRack(work: Work, line: LandedLine, rack: Rack): Promise<OnRack> {
+  const lot = line.of === 'lot' ? await hang(work, line, rack) : null;
+  const hardware = line.of === 'hardware' ? line.hardware : null;
+  const item = lot === null ? { hardwareId: hardware?.id ?? 0 } : { lotId: lot.id };
+  const movement = await receiveStock(work, {
+    ...item,
+    quantity: line.quantity,
+    value: line.goods.plus(line.carriage),
+    purchaseOrderId: rack.purchaseOrderId,
+    reason: batchWords(line.batch),
+  });
+  await log(work, line, lot);
+  return { lotId: lot?.id ?? null, hardwareId: hardware?.id ?? null, movementId: movement.id };
+}
+
+/** How a batch stands in the ledger, where a failure is traced. */
+export const batchWords = (batch: string) => (batch === '' ? '' : `batch ${batch}`);
+
+/** The lot with its tag, before anything is on hand of it. */
+async function hang(
+  work: Work,
+  line: LandedLine & { of: 'lot' },
+  { receivedOn }: Rack,
+): Promise<Lot> {
+  const { typed, field, leather, purchaseLineId, goods, carriage } = line;
+  if (typed.tag !== '') await requireFreeTag(work.em, typed.tag, `${field}.tag`);
+  const { form, pieces, grade, shade, place, supplierLot, widthMm, heightMm } = typed;
+  const lot = work.em.create(Lot, {
+    tag: typed.tag === '' ? await drawTag(work.em) : typed.tag,
+    leatherId: leather.id,
+    form,
+    pieces,
+    measuredAreaMm2: new Decimal(typed.measuredAreaMm2),
+    cost: goods.plus(carriage),
+    receivedOn,
+    purchaseLineId,
+  });
+  assignDefined(lot, { grade, shade, place, supplierLot });
+  if (widthMm !== null) lot.widthMm = new Decimal(widthMm);
+  if (heightMm !== null) lot.heightMm = new Decimal(heightMm);
+  await work.em.flush();
+  return lot;
+}
+
+function log(work: Work, line: LandedLine, lot: Lot | null): Promise<void> {
+  if (line.of === 'hardware') {
+    const { quantity, hardware, batch } = line;
+    return logDeed(work, {
+      action: `received ${quantity} × ${hardware.name}`,
+      subjectKind: 'hardware',
+      subjectId: hardware.id,
+      detail: { quantity, ...(batch !== '' && { batch }) },
+    });
+  }
+  const { measuredAreaMm2, markedAreaMm2 } = line.typed;
+  return logDeed(work, {
+    action: `received lot ${lot?.tag ?? ''} of ${line.leather.name}`,
+    subjectKind: 'lot',
+    subjectId: lot?.id ?? null,
+    detail: { measuredAreaMm2, ...(markedAreaMm2 !== null && { markedAreaMm2 }) },
+  });
+}

@@ -1,0 +1,48 @@
+import { addDays, minorDigits } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import type { PurchaseLine } from '@hidewright/contract';
+import { dayIn } from '../../day-in.ts';
+import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
+import type { Work } from '../../work.ts';
+import { sayArea } from '../stock/say-area.ts';
+import { Supplier } from '../suppliers/supplier.entity.ts';
+import { Workshop } from '../workshop/workshop.entity.ts';
+import type { PurchaseOrder } from './purchase-order.entity.ts';
+import { readOnePurchaseOrder } from './read-purchase-orders.ts';
+
+/** What goes on paper for an order as it is now; a draft as it would be if it were sent today. */
+export async function paperOf(work: Work, order: PurchaseOrder): Promise<PurchaseOrderPaper> {
+  const workshop = await work.em.findOneOrFail(Workshop, 1);
+  const { leadDays } = await work.em.findOneOrFail(Supplier, order.supplierId);
+  const told = await readOnePurchaseOrder(work.em, order.id);
+  return {
+    number: order.number,
+    shopName: workshop.name,
+    shopAddress: workshop.address,
+    supplierName: told.supplierName,
+    day: order.sentAt === null ? work.today : dayIn(workshop.timeZone, new Date(order.sentAt)),
+    expectedOn: order.expectedOn ?? addDays(work.today, leadDays),
+    currency: workshop.currency,
+    digits: minorDigits(workshop.currency),
+    lines: told.lines.map((line) => printedLine(line, workshop.areaUnit)),
+    total: told.total ?? '0.00',
+    note: order.note,
+  };
+}
+
+function printedLine(
+  line: PurchaseLine,
+  unit: Workshop['areaUnit'],
+): PurchaseOrderPaper['lines'][number] {
+  const { name, areaMm2, quantity, unitPrice = '0.00', amount = '0.00' } = line;
+  return {
+    name,
+    quantity:
+      areaMm2 === null
+        ? new Intl.NumberFormat('en').format(quantity ?? 0)
+        : sayArea(new Decimal(areaMm2), unit),
+    unitPrice,
+    per: areaMm2 === null ? 'each' : 'per ft²',
+    amount,
+  };
+}

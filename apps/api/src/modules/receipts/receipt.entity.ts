@@ -1,0 +1,44 @@
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import type { Decimal } from 'decimal.js';
+import { MoneyType, PercentType } from '../../db/columns/columns.ts';
+
+/** One delivery that was taken in. */
+@Entity({ tableName: 'receipt' })
+export class Receipt {
+  [OptionalProps]?: 'version';
+
+  @PrimaryKey({ type: 'integer', columnType: 'integer' })
+  id!: number;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  purchaseOrderId: number | null = null;
+
+  @Property({ type: 'text', columnType: 'text' })
+  receivedOn!: string;
+
+  @Property({ type: 'text', columnType: 'text' })
+  at!: string;
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  freight!: Decimal;
+
+  @Property({ type: MoneyType, columnType: 'integer' })
+  duty!: Decimal;
+
+  /** What freight and duty are shared by. */
+  @Property({ type: 'text', columnType: 'text' })
+  sharedBy!: 'value' | 'area' | 'count';
+
+  /** How far a side might miss its mark when it came. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  tolerancePercent!: Decimal;
+
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  actorId: number | null = null;
+
+  @Property({ type: 'text', columnType: 'text' })
+  actorName!: string;
+
+  @Property({ type: 'integer', columnType: 'integer', version: true })
+  version!: number;
+}

@@ -1,0 +1,252 @@
+import fc from 'fast-check';
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { Decimal } from 'decimal.js';
+import { ft2, orderMore, stockUp } from '../../testing/stockroom.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+import { verifyFolder } from '../../verify/verify-folder.ts';
+
+let shop: Awaited<ReturnType<typeof startTestShop>>;
+let things: Awaited<ReturnType<typeof stockUp>>;
+let order: Awaited<ReturnType<typeof orderMore>>;
+
+beforeAll(async () => {
+  shop = await startTestShop();
+});
+afterAll(() => shop.close());
+beforeEach(async () => {
+  things = await stockUp(shop);
+  order = await orderMore(shop, things);
+});
+
+const side = (more: object = {}) => ({
+  leatherId: things.leatherId,
+  purchaseLineId: order.leatherLine,
+  form: 'side',
+  measuredAreaMm2: ft2(24),
+  ...more,
+});
+const rivets = (quantity: number, more: object = {}) => ({
+  hardwareId: things.hardwareId,
+  purchaseLineId: order.rivetLine,
+  quantity,
+  ...more,
+});
+const receive = (body: object, role: 'owner' | 'maker' = 'owner') =>
+  shop
+    .as(role)
+    .post('/api/receipts')
+    .send({ purchaseOrderId: order.id, ...body });
+const ledger = async (query: string) =>
+  (await shop.as('owner').get(`/api/stock-movements?${query}`).expect(200)).body.items;
+const correct = (id: number, version: number, body: object) =>
+  shop.as('owner').patch(`/api/receipts/${id}`).set('If-Match', `"${version}"`).send(body);
+
+describe('freight and duty', () => {
+  it('become part of what the leather and the hardware cost, to the cent', async () => {
+    const { body } = await receive({
+      lots: [side()],
+      hardware: [rivets(1000)],
+      freight: '18.00',
+      duty: '3.33',
+    }).expect(201);
+    const [lot, hardware] = body.receipt.lines;
+    expect(lot).toMatchObject({ goods: '204.00', carriage: '11.87' });
+    expect(hardware).toMatchObject({ goods: '162.50', carriage: '9.46' });
+    expect(body.lots[0]).toMatchObject({ cost: '215.87', valueOnHand: '215.87' });
+    expect(body.hardware[0]).toMatchObject({ valueOnHand: '171.96' });
+    expect(await ledger(`lotId=${lot.lotId}`)).toMatchObject([{ value: '215.87' }]);
+  });
+
+  it('are borne by the leather alone where they are shared by area', async () => {
+    const { body } = await receive({
+      lots: [side({ measuredAreaMm2: ft2(30) }), side({ measuredAreaMm2: ft2(10) })],
+      hardware: [rivets(1000)],
+      freight: '20.00',
+      sharedBy: 'area',
+    }).expect(201);
+    const carriage = body.receipt.lines.map((line: { carriage: string }) => line.carriage);
+    expect(carriage).toEqual(['15.00', '5.00', '0.00']);
+  });
+
+  it('are refused where nothing that came can bear them', async () => {
+    const refused = await receive({
+      hardware: [rivets(10)],
+      freight: '20.00',
+      sharedBy: 'area',
+    }).expect(422);
+    expect(refused.body.errors).toMatchObject([{ field: 'sharedBy' }]);
+    const alone = await receive({ nothingMore: true, freight: '5.00' }).expect(422);
+    expect(alone.body.errors).toMatchObject([{ field: 'freight' }]);
+  });
+
+  it('are left to the owner, and a maker never sees them', async () => {
+    const refused = await receive({ hardware: [rivets(10)], freight: '1.00' }, 'maker').expect(422);
+    expect(refused.body.errors).toMatchObject([{ field: 'freight' }]);
+    await receive({ hardware: [rivets(10)], freight: '1.00' }).expect(201);
+    const seen = await shop
+      .as('maker')
+      .get(`/api/receipts?purchaseOrderId=${order.id}`)
+      .expect(200);
+    expect(seen.body.items).toHaveLength(1);
+    expect(seen.text).not.toMatch(/"(freight|duty|goods|carriage)":/);
+  });
+
+  it('make the value of stock what goods and carriage come to, whatever comes', async () => {
+    const cents = fc.integer({ min: 0, max: 500_00 }).map((whole) => (whole / 100).toFixed(2));
+    const oneDelivery = fc.record({
+      areas: fc.array(fc.integer({ min: 1, max: 400 }), { minLength: 1, maxLength: 4 }),
+      counts: fc.array(fc.integer({ min: 1, max: 5000 }), { maxLength: 3 }),
+      freight: cents,
+      duty: cents,
+      sharedBy: fc.constantFrom('value', 'area'),
+    });
+    await fc.assert(
+      fc.asyncProperty(oneDelivery, async ({ areas, counts, ...carriage }) => {
+        const { body } = await shop
+          .as('owner')
+          .post('/api/receipts')
+          .send({
+            ...carriage,
+            lots: areas.map((tenths) => ({
+              leatherId: things.leatherId,
+              form: 'side',
+              measuredAreaMm2: new Decimal('9290.304').times(tenths).toFixed(),
+            })),
+            hardware: counts.map((quantity) => ({ hardwareId: things.hardwareId, quantity })),
+          })
+          .expect(201);
+        const { lines } = body.receipt as { lines: { goods: string; carriage: string }[] };
+        const borne = Decimal.sum(0, ...lines.map((line) => line.carriage));
+        expect(borne.toFixed(2)).toBe(new Decimal(carriage.freight).plus(carriage.duty).toFixed(2));
+        const whole = Decimal.sum(borne, ...lines.map((line) => line.goods));
+        const recent = await ledger(`limit=${lines.length}`);
+        const values = recent.map((movement: { value: string }) => movement.value);
+        expect(Decimal.sum(0, ...values).toFixed(2)).toBe(whole.toFixed(2));
+      }),
+      { numRuns: 25 },
+    );
+  });
+});
+
+describe('what a delivery cost, put right', () => {
+  it('takes in freight that is known only later, and both can be read in the ledger', async () => {
+    const first = await receive({ lots: [side()], hardware: [rivets(400)] }, 'maker').expect(201);
+    const { id, version } = first.body.receipt;
+    const { body } = await correct(id, version, { freight: '26.90' }).expect(200);
+    expect(body).toMatchObject({ freight: '26.90', untouched: true, version: version + 1 });
+    const [lot, hardware] = body.lines;
+    expect(lot).toMatchObject({ goods: '204.00', carriage: '20.40' });
+    expect(hardware).toMatchObject({ goods: '65.00', carriage: '6.50' });
+    const rows = await ledger(`lotId=${lot.lotId}`);
+    expect(rows.map((row: { value: string }) => row.value)).toEqual([
+      '224.40',
+      '-204.00',
+      '204.00',
+    ]);
+    const read = await shop.as('owner').get(`/api/lots/${lot.lotId}`).expect(200);
+    expect(read.body).toMatchObject({
+      cost: '224.40',
+      onHandAreaMm2: ft2(24).replace(/\.0+$/, ''),
+    });
+  });
+
+  it('shows what was paid against what was ordered', async () => {
+    const first = await receive({ hardware: [rivets(1000)] }).expect(201);
+    const { id, version, lines } = first.body.receipt;
+    const goods = [{ receiptLineId: lines[0].id, goods: '170.00' }];
+    await correct(id, version, { goods }).expect(200);
+    const read = await shop.as('owner').get(`/api/purchase-orders/${order.id}`).expect(200);
+    expect(read.body.lines[1]).toMatchObject({ paid: '170.00', priceDifference: '7.50' });
+    expect(read.body.lines[0]).toMatchObject({ paid: '0.00', priceDifference: '0.00' });
+    const stale = await correct(id, version, { freight: '1.00' }).expect(412);
+    expect(stale.body.changed).toMatchObject({ by: 'The owner' });
+  });
+
+  it('is refused once something of it has moved', async () => {
+    const first = await receive({ lots: [side()], hardware: [rivets(400)] }).expect(201);
+    const { id, version } = first.body.receipt;
+    await shop
+      .as('maker')
+      .post('/api/adjustments')
+      .send({ of: 'hardware', hardwareId: things.hardwareId, counted: 399, reason: 'Counted' })
+      .expect(201);
+    const refused = await correct(id, version, { freight: '1.00' }).expect(409);
+    expect(refused.body.detail).toMatch(/has moved since/);
+    const read = await shop.as('owner').get(`/api/receipts/${id}`).expect(200);
+    expect(read.body).toMatchObject({ untouched: false, freight: '0.00' });
+  });
+
+  it('names only lines of its own', async () => {
+    const first = await receive({ hardware: [rivets(5)] }).expect(201);
+    const { id, version } = first.body.receipt;
+    const goods = [{ receiptLineId: 999_999, goods: '1.00' }];
+    const refused = await correct(id, version, { goods }).expect(422);
+    expect(refused.body.errors).toMatchObject([{ field: 'goods' }]);
+  });
+});
+
+describe('part deliveries', () => {
+  it('leave the rest awaited with its own day, and closed it is short', async () => {
+    const first = await receive({ hardware: [rivets(600)] }).expect(201);
+    const { version } = first.body.purchaseOrder;
+    const awaitOn = (expectedOn: string, read = version) =>
+      shop
+        .as('owner')
+        .patch(`/api/purchase-orders/${order.id}/lines/${order.rivetLine}`)
+        .set('If-Match', `"${read}"`)
+        .send({ expectedOn });
+    const moved = await awaitOn('2026-12-21').expect(200);
+    expect(moved.body.lines).toMatchObject([
+      { expectedOn: '2026-12-11' },
+      { expectedOn: '2026-12-21', toCome: { quantity: 400 }, short: { quantity: 0 } },
+    ]);
+    await awaitOn('2026-12-22').expect(412);
+    const over = await awaitOn('2026-11-30', moved.body.version).expect(422);
+    expect(over.body.errors).toMatchObject([{ field: 'expectedOn' }]);
+    const closed = await receive({ nothingMore: true }).expect(201);
+    expect(closed.body).toMatchObject({ receipt: null, purchaseOrder: { state: 'received' } });
+    expect(closed.body.purchaseOrder.lines[1]).toMatchObject({
+      toCome: { quantity: 0 },
+      short: { quantity: 400 },
+    });
+    await awaitOn('2026-12-22', closed.body.purchaseOrder.version).expect(409);
+  });
+
+  it('are not put on the rack twice by two people', async () => {
+    const body = { lots: [side()], hardware: [rivets(600)], receiptsSeen: 0 };
+    const [one, two] = await Promise.all([receive(body, 'maker'), receive(body)]);
+    expect([one.status, two.status].sort()).toEqual([201, 409]);
+    const late = one.status === 409 ? one : two;
+    const quick = one.status === 409 ? 'The owner' : 'The maker';
+    expect(late.body.detail).toContain(`${quick} has received 1 lot of Oak tan russet`);
+    expect(late.body.detail).toMatch(/600 × Copper rivet .+ part received now/);
+    const list = await shop.as('maker').get(`/api/receipts?purchaseOrderId=${order.id}`);
+    expect(list.body.items).toHaveLength(1);
+    await receive({ hardware: [rivets(400)], receiptsSeen: 1 }).expect(201);
+  });
+
+  it('are refused for an order that is cancelled', async () => {
+    await shop
+      .as('owner')
+      .post(`/api/purchase-orders/${order.id}/cancellations`)
+      .send({ reason: 'Too late' })
+      .expect(201);
+    const refused = await receive({ hardware: [rivets(1)] }).expect(409);
+    expect(refused.body.detail).toMatch(/^P-\d+ is cancelled\./);
+  });
+
+  it('keep the batch of hardware in the ledger', async () => {
+    const { body } = await receive({ hardware: [rivets(600, { batch: 'K7-204' })] }).expect(201);
+    expect(body.receipt.lines[0]).toMatchObject({ batch: 'K7-204' });
+    const rows = await ledger(`hardwareId=${things.hardwareId}`);
+    expect(rows).toMatchObject([{ reason: 'batch K7-204', quantity: 600 }]);
+    await correct(body.receipt.id, body.receipt.version, { duty: '2.00' }).expect(200);
+    const [again] = await ledger(`hardwareId=${things.hardwareId}`);
+    expect(again).toMatchObject({ reason: 'batch K7-204, cost put right', value: '99.50' });
+  });
+});
+
+it('keeps every rule of the books', async () => {
+  const results = await verifyFolder(shop.context.config.dataDir);
+  expect(results.flatMap(({ faults }) => faults)).toEqual([]);
+});

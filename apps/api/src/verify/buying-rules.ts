@@ -1,0 +1,42 @@
+import { none, type Rule } from './rule.ts';
+
+export const buyingRules: Rule[] = [
+  none(
+    'An order line counts as received what came on it',
+    `SELECT p.number || ' line ' || n.position || ' says ' || n.received || ' received, its deliveries ' ||
+      COALESCE(SUM(l.quantity), 0) AS fault
+    FROM purchase_line n JOIN purchase_order p ON p.id = n.purchase_order_id
+    LEFT JOIN receipt_line l ON l.purchase_line_id = n.id
+    GROUP BY n.id HAVING COALESCE(SUM(l.quantity), 0) <> n.received`,
+  ),
+  none(
+    'An order counts its deliveries',
+    `SELECT p.number || ' says ' || p.receipts || ' deliveries, and ' || COUNT(r.id) || ' are there' AS fault
+    FROM purchase_order p LEFT JOIN receipt r ON r.purchase_order_id = p.id
+    GROUP BY p.id HAVING COUNT(r.id) <> p.receipts`,
+  ),
+  none(
+    'Freight and duty of a delivery are borne by its lines, to the cent',
+    `SELECT 'the delivery of ' || r.received_on || ' cost ' || (r.freight + r.duty) || ' to bring, its lines bear ' ||
+      COALESCE(SUM(l.carriage), 0) AS fault
+    FROM receipt r LEFT JOIN receipt_line l ON l.receipt_id = r.id
+    GROUP BY r.id HAVING COALESCE(SUM(l.carriage), 0) <> r.freight + r.duty`,
+  ),
+  none(
+    'What came stands in the ledger with its quantity, at what goods and carriage cost',
+    `SELECT 'line ' || l.position || ' of the delivery of ' || r.received_on || ' differs from the ledger' AS fault
+    FROM receipt_line l JOIN receipt r ON r.id = l.receipt_id JOIN stock_movement m ON m.id = l.movement_id
+    WHERE m.kind <> 'receive' OR m.quantity <> l.quantity OR m.value <> l.goods + l.carriage
+      OR m.lot_id IS NOT l.lot_id OR m.hardware_id IS NOT l.hardware_id
+      OR m.purchase_order_id IS NOT r.purchase_order_id`,
+  ),
+  none(
+    'A claim is of lots that came with its delivery and are short of their mark',
+    `SELECT 'a claim on ' || p.number || ' misses ' || c.missing_area_mm2 || ', its lots ' ||
+      COALESCE(SUM(l.marked_area_mm2 - l.quantity), 0) AS fault
+    FROM supplier_claim c JOIN purchase_order p ON p.id = c.purchase_order_id
+    LEFT JOIN claimed_lot k ON k.supplier_claim_id = c.id
+    LEFT JOIN receipt_line l ON l.id = k.receipt_line_id AND l.receipt_id = c.receipt_id
+    GROUP BY c.id HAVING COALESCE(SUM(l.marked_area_mm2 - l.quantity), 0) <> c.missing_area_mm2`,
+  ),
+];

@@ -1,0 +1,111 @@
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import { id, idParams, line, money, paperNumber, version } from './fields.ts';
+
+export const claimStates = ['open', 'credited', 'given up'] as const;
+export type ClaimState = (typeof claimStates)[number];
+
+const claimedLot = z.object({
+  receiptLineId: id,
+  lotId: id,
+  lotTag: z.string(),
+  leatherName: z.string(),
+  markedAreaMm2: z.string(),
+  measuredAreaMm2: z.string(),
+});
+
+export const supplierClaim = z
+  .object({
+    id,
+    purchaseOrderId: id,
+    purchaseOrderNumber: paperNumber,
+    supplierName: z.string(),
+    receiptId: id,
+    state: z.enum(claimStates),
+    lots: z.array(claimedLot),
+    missingAreaMm2: z.string(),
+    /** What the missing area was paid for. */
+    worth: confidential(z.string()),
+    text: z.string(),
+    sentBy: z.enum(['mail', 'hand']),
+    openedAt: z.string(),
+    credited: confidential(z.string().nullable()),
+    /** Why it was given up. */
+    note: z.string(),
+    closedAt: z.string().nullable(),
+    version,
+  })
+  .meta({ id: 'SupplierClaim' });
+export type SupplierClaim = z.infer<typeof supplierClaim>;
+
+export const draftClaim = endpoint({
+  method: 'GET',
+  path: '/receipts/{id}/claim-draft',
+  summary:
+    'What could be claimed of a delivery: the lots short of their mark, and a letter to start from',
+  access: ['owner'],
+  params: idParams,
+  reply: z.object({
+    supplierName: z.string(),
+    supplierEmail: z.string(),
+    lots: z.array(claimedLot),
+    missingAreaMm2: z.string(),
+    worth: z.string(),
+    text: z.string(),
+  }),
+});
+
+const letter = z
+  .string('Write what you claim.')
+  .trim()
+  .min(1, 'Write what you claim.')
+  .max(4000, 'Keep it to 4,000 characters.')
+  .regex(/^(?:[^\p{Cc}]|[\n\r\t])*$/u, 'Leave out control characters.');
+
+export const openClaim = endpoint({
+  method: 'POST',
+  path: '/receipts/{id}/claims',
+  summary: 'Claim the area that lots are short of their mark, by e-mail or by hand',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    by: z.enum(['mail', 'hand'], 'Choose by e-mail or by hand.'),
+    text: letter,
+  }),
+  reply: supplierClaim,
+});
+
+export const listClaims = endpoint({
+  method: 'GET',
+  path: '/purchase-orders/{id}/claims',
+  summary: 'What was claimed on an order',
+  access: ['owner', 'bookkeeper'],
+  params: idParams,
+  reply: z.object({ items: z.array(supplierClaim) }),
+});
+
+export const closeClaim = endpoint({
+  method: 'PATCH',
+  path: '/supplier-claims/{id}',
+  summary: 'Note what the supplier credited, or give the claim up',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.discriminatedUnion(
+    'state',
+    [
+      z.strictObject({
+        state: z.literal('credited'),
+        credited: money.refine((text) => Number(text) > 0, 'Enter what was credited, above 0.'),
+      }),
+      z.strictObject({
+        state: z.literal('given up'),
+        note: line(200, 'Say why, in a few words.'),
+      }),
+    ],
+    'Say whether it was credited or is given up.',
+  ),
+  reply: supplierClaim,
+});
