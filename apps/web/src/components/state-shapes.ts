@@ -46,4 +46,5 @@ export const stateLooks: Readonly<Record<string, Look>> = {
   again: ['wait', 'attention'],
   open: ['hollow', 'act'],
   locked: ['check', 'quiet'],
+  'given up': ['dash', 'quiet'],
 };

@@ -1,7 +1,12 @@
 import {
   addPurchaseOrder,
   cancelPurchaseOrder,
+  changeAwaitedDay,
   changePurchaseOrder,
+  changeReceipt,
+  closeClaim,
+  openClaim,
+  returnToSupplier,
   sendPurchaseOrder,
 } from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
@@ -13,3 +18,13 @@ export const useChangePurchaseOrder = () => useSend(changePurchaseOrder);
 export const useSendPurchaseOrder = () => useSend(sendPurchaseOrder);
 
 export const useCancelPurchaseOrder = () => useSend(cancelPurchaseOrder);
+
+export const useChangeAwaitedDay = () => useSend(changeAwaitedDay);
+
+export const useChangeReceipt = () => useSend(changeReceipt);
+
+export const useOpenClaim = () => useSend(openClaim);
+
+export const useCloseClaim = () => useSend(closeClaim);
+
+export const useReturnToSupplier = () => useSend(returnToSupplier);

@@ -1,5 +1,8 @@
 import {
+  listClaims,
   listPurchaseOrders,
+  listReceipts,
+  listSupplierReturns,
   readPurchaseOrder,
   type PurchaseOrderState,
 } from '@hidewright/contract';
@@ -9,6 +12,7 @@ import { call } from '../../lib/api.ts';
 interface Wanted {
   state?: PurchaseOrderState | undefined;
   supplierId?: number | undefined;
+  awaited?: 'yes' | undefined;
 }
 
 /** Orders to suppliers, newest first, page by page. */
@@ -29,5 +33,28 @@ export function purchaseOrderQuery(id: number) {
   return queryOptions({
     queryKey: ['purchase-orders', id],
     queryFn: ({ signal }) => call(readPurchaseOrder, { params: { id }, signal }),
+  });
+}
+
+/** The deliveries of an order, newest first. */
+export function receiptsQuery(purchaseOrderId: number) {
+  return queryOptions({
+    queryKey: ['purchase-orders', purchaseOrderId, 'receipts'],
+    queryFn: ({ signal }) => call(listReceipts, { query: { purchaseOrderId, limit: 200 }, signal }),
+  });
+}
+
+/** What of an order went back to its supplier. */
+export function supplierReturnsQuery(id: number) {
+  return queryOptions({
+    queryKey: ['purchase-orders', id, 'returns'],
+    queryFn: ({ signal }) => call(listSupplierReturns, { params: { id }, signal }),
+  });
+}
+
+export function claimsQuery(id: number) {
+  return queryOptions({
+    queryKey: ['purchase-orders', id, 'claims'],
+    queryFn: ({ signal }) => call(listClaims, { params: { id }, signal }),
   });
 }

@@ -1,6 +1,4 @@
-import { adjustStock, receiveDelivery } from '@hidewright/contract';
+import { adjustStock } from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
 
 export const useAdjustStock = () => useSend(adjustStock);
-
-export const useReceiveDelivery = () => useSend(receiveDelivery);

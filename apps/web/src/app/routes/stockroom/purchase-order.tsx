@@ -4,36 +4,60 @@ import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
+import { ClaimsCard } from '../../../features/purchase-orders/components/claims-card.tsx';
 import { OrderActions } from '../../../features/purchase-orders/components/order-actions.tsx';
 import { PurchaseLinesTable } from '../../../features/purchase-orders/components/purchase-lines-table.tsx';
 import { PurchaseOrderTicket } from '../../../features/purchase-orders/components/purchase-order-ticket.tsx';
-import { purchaseOrderQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
+import { ReceiptCard } from '../../../features/purchase-orders/components/receipt-card.tsx';
+import { ReturnsCard } from '../../../features/purchase-orders/components/returns-card.tsx';
+import {
+  purchaseOrderQuery,
+  receiptsQuery,
+} from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useRole } from './use-role.ts';
 
 export async function loader({ params }: LoaderFunctionArgs) {
-  return queryClient.ensureQueryData(purchaseOrderQuery(Number(params['id'])));
+  const id = Number(params['id']);
+  const [order] = await Promise.all([
+    queryClient.ensureQueryData(purchaseOrderQuery(id)),
+    queryClient.ensureQueryData(receiptsQuery(id)),
+  ]);
+  return order;
 }
 
 export function Component() {
   const { id } = useLoaderData<PurchaseOrder>();
-  const { isOwner, handlesStock } = useRole();
+  const { role, isOwner, handlesStock } = useRole();
   const { data: order } = useSuspenseQuery(purchaseOrderQuery(id));
+  const { data: receipts } = useSuspenseQuery(receiptsQuery(id));
   return (
     <div className="space-y-5">
       <PageTitle>{`${order.number}, ${order.supplierName}`}</PageTitle>
       <PurchaseOrderTicket
         order={order}
-        actions={<OrderActions order={order} isOwner={isOwner} mayReceive={handlesStock} />}
+        actions={
+          <OrderActions
+            order={order}
+            isOwner={isOwner}
+            mayReceive={handlesStock}
+            maySeePrices={role !== 'maker'}
+          />
+        }
       />
       <Card title="What is ordered">
-        <PurchaseLinesTable order={order} />
+        <PurchaseLinesTable order={order} isOwner={isOwner} />
       </Card>
       {order.note !== '' && (
         <Card title="Note to the supplier">
           <p className="max-w-prose whitespace-pre-line">{order.note}</p>
         </Card>
       )}
+      {receipts.items.map((receipt) => (
+        <ReceiptCard key={receipt.id} order={order} receipt={receipt} isOwner={isOwner} />
+      ))}
+      {role !== 'maker' && <ClaimsCard orderId={id} isOwner={isOwner} />}
+      <ReturnsCard orderId={id} receipts={receipts.items} isOwner={isOwner} />
     </div>
   );
 }

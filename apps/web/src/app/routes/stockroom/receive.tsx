@@ -1,5 +1,5 @@
 import type { PurchaseOrder, receiveDelivery, ReplyOf } from '@hidewright/contract';
-import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseInfiniteQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
 import { Button } from '../../../components/button.tsx';
@@ -8,16 +8,21 @@ import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { hardwareListQuery } from '../../../features/hardware/hardware.queries.ts';
+import { workshopQuery } from '../../../features/office/office.queries.ts';
 import { leathersQuery } from '../../../features/leathers/leathers.queries.ts';
-import { purchaseOrderQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
-import { ReceiveForm } from '../../../features/stock/components/receive-form.tsx';
-import { ReceivedSummary } from '../../../features/stock/components/received-summary.tsx';
+import {
+  purchaseOrderQuery,
+  purchaseOrdersQuery,
+} from '../../../features/purchase-orders/purchase-orders.queries.ts';
+import { AwaitedOrders } from '../../../features/receiving/components/awaited-orders.tsx';
+import { ReceiveForm } from '../../../features/receiving/components/receive-form.tsx';
+import { ReceivedSummary } from '../../../features/receiving/components/received-summary.tsx';
 import {
   blankDelivery,
   blankHardware,
   blankLot,
   deliveryOf,
-} from '../../../features/stock/typed-delivery.ts';
+} from '../../../features/receiving/typed-delivery.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { choicesOf } from './choices.ts';
@@ -27,6 +32,8 @@ export async function loader({ request }: LoaderFunctionArgs) {
   const orderId = Number(new URL(request.url).searchParams.get('order'));
   const [order] = await Promise.all([
     orderId > 0 ? queryClient.fetchQuery(purchaseOrderQuery(orderId)) : null,
+    queryClient.fetchInfiniteQuery(purchaseOrdersQuery({ awaited: 'yes' })),
+    queryClient.ensureQueryData(workshopQuery()),
     queryClient.ensureQueryData(leathersQuery()),
     queryClient.ensureQueryData(hardwareListQuery()),
   ]);
@@ -47,13 +54,25 @@ export function Component() {
   return (
     <>
       <PageHeader title={title} subtitle={order?.supplierName} />
-      {handlesStock ? (
+      {!handlesStock && <EmptyState title="The owner and the maker receive deliveries." />}
+      {handlesStock && saysWhat(search) && (
         <Receiving key={String(search)} asked={order} onReceived={setReceived} />
-      ) : (
-        <EmptyState title="The owner and the maker receive deliveries." />
       )}
+      {handlesStock && !saysWhat(search) && <Choosing />}
     </>
   );
+}
+
+/** An order, none, or the leather or hardware that somebody began from. */
+const saysWhat = (search: URLSearchParams) =>
+  ['order', 'leather', 'hardware'].some((name) => search.has(name));
+
+function Choosing() {
+  const { data } = useSuspenseInfiniteQuery(purchaseOrdersQuery({ awaited: 'yes' }));
+  const orders = data.pages.flatMap((page) => page.items);
+  // Those without a day come last.
+  const day = (order: PurchaseOrder) => order.expectedOn ?? '9999-12-31';
+  return <AwaitedOrders orders={[...orders].sort((a, b) => day(a).localeCompare(day(b)))} />;
 }
 
 interface ReceivingProps {
@@ -63,17 +82,26 @@ interface ReceivingProps {
 
 function Receiving({ asked, onReceived }: ReceivingProps) {
   // As it was when the form was opened: what is received here must not pull the form away.
-  const [order] = useState(asked);
+  const [order, setOrder] = useState(asked);
   const [search] = useSearchParams();
   const { today } = useWorkshop();
   const { isOwner } = useRole();
   const { data: leathers } = useSuspenseQuery(leathersQuery());
   const { data: hardware } = useSuspenseQuery(hardwareListQuery());
+  const { data: workshop } = useSuspenseQuery(workshopQuery());
   if (leathers.items.length + hardware.items.length === 0)
     return <NothingToReceive isOwner={isOwner} />;
   if (order && order.state !== 'sent' && order.state !== 'part received') {
     return <EmptyState title={`${order.number} is ${order.state}: nothing of it is awaited.`} />;
   }
+
+  async function lookAgain() {
+    if (order === null) return undefined;
+    const now = await queryClient.fetchQuery({ ...purchaseOrderQuery(order.id), staleTime: 0 });
+    setOrder(now);
+    return now;
+  }
+
   return (
     <div className="max-w-3xl">
       <ReceiveForm
@@ -81,8 +109,10 @@ function Receiving({ asked, onReceived }: ReceivingProps) {
         defaults={order ? deliveryOf(order, today) : directly(search, today)}
         leathers={choicesOf(leathers.items)}
         hardware={choicesOf(hardware.items)}
+        tolerancePercent={workshop.areaTolerancePercent}
         mayPrice={isOwner}
         onReceived={onReceived}
+        onLookAgain={lookAgain}
       />
     </div>
   );

@@ -117,6 +117,12 @@ export function WorkshopForm({
       />
       <LengthField name="spacingMm" label="Spacing between two cuts" />
       <LengthField name="trimMm" label="Trim at the edges" />
+      <DecimalField
+        name="areaTolerancePercent"
+        label="A side may miss its mark by"
+        unit="%"
+        help="Measuring by hand and by machine differ. What misses more is said when it comes, and can be claimed. Yours to set."
+      />
       <Stitch />
       <h2>Terms</h2>
       <DecimalField

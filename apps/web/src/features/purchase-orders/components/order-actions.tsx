@@ -1,7 +1,9 @@
-import type { PurchaseOrder } from '@hidewright/contract';
+import { purchaseOrderPaper, type PurchaseOrder } from '@hidewright/contract';
 import { useState } from 'react';
+import { buttonLook } from '../../../components/button-look.ts';
 import { Button } from '../../../components/button.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
+import { addressOf } from '../../../lib/api.ts';
 import { CancelOrderDialog } from './cancel-order-dialog.tsx';
 import { SendOrderDialog } from './send-order-dialog.tsx';
 
@@ -9,10 +11,12 @@ interface OrderActionsProps {
   order: PurchaseOrder;
   isOwner: boolean;
   mayReceive: boolean;
+  maySeePrices: boolean;
 }
 
 /** What the order's state allows now. */
-export function OrderActions({ order, isOwner, mayReceive }: OrderActionsProps) {
+export function OrderActions(props: OrderActionsProps) {
+  const { order, isOwner, mayReceive, maySeePrices } = props;
   const [asking, setAsking] = useState<'send' | 'cancel'>();
   const { id, state } = order;
   const close = () => setAsking(undefined);
@@ -34,6 +38,15 @@ export function OrderActions({ order, isOwner, mayReceive }: OrderActionsProps) 
         <LinkButton tone="primary" to={`/stockroom/receive?order=${id}`}>
           Receive
         </LinkButton>
+      )}
+      {maySeePrices && (
+        <a
+          href={addressOf(purchaseOrderPaper, { params: { id } })}
+          download
+          className={buttonLook({})}
+        >
+          PDF
+        </a>
       )}
       <SendOrderDialog order={order} open={asking === 'send'} onOpenChange={close} />
       <CancelOrderDialog order={order} open={asking === 'cancel'} onOpenChange={close} />

@@ -1,24 +1,23 @@
 import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
+import { goodsText } from '../goods-text.ts';
+import { AwaitedDayDialog } from './awaited-day-dialog.tsx';
+import { LineProgress } from './line-progress.tsx';
 
 const placeOf = (line: PurchaseLine) =>
   line.of === 'leather'
     ? `/stockroom/leather/${line.leatherId}`
     : `/stockroom/hardware/${line.hardwareId}`;
 
-function columnsFor(
-  { areaUnit, currency }: Workshop,
-  total: string | undefined,
-): Column<PurchaseLine>[] {
-  const quantity = (area: string | null, pieces: number | null) =>
-    area === null ? countText(pieces ?? 0) : areaText(area, areaUnit);
-  const prices: Column<PurchaseLine>[] = [
+function priceColumns(currency: string, order: PurchaseOrder): Column<PurchaseLine>[] {
+  const ordered: Column<PurchaseLine>[] = [
     {
       id: 'price',
       header: `Price, ${currency}`,
@@ -34,9 +33,48 @@ function columnsFor(
       value: (row) => row.amount,
       cell: (row) => row.amount !== undefined && moneyText(row.amount),
       align: 'right',
-      total: () => moneyText(total ?? '0'),
+      total: () => moneyText(order.total ?? '0'),
     },
   ];
+  return order.receipts === 0 ? ordered : [...ordered, ...paidColumns(currency)];
+}
+
+function paidColumns(currency: string): Column<PurchaseLine>[] {
+  return [
+    {
+      id: 'paid',
+      header: `Paid, ${currency}`,
+      value: (row) => row.paid,
+      cell: (row) => row.paid !== undefined && moneyText(row.paid),
+      align: 'right',
+      total: (rows) => sumMoney(rows.map((row) => row.paid ?? '0')),
+    },
+    {
+      id: 'difference',
+      header: 'Above the price',
+      value: (row) => row.priceDifference,
+      cell: (row) => <PriceDifference amount={row.priceDifference ?? '0'} />,
+      align: 'right',
+      total: (rows) => sumMoney(rows.map((row) => row.priceDifference ?? '0')),
+    },
+  ];
+}
+
+function PriceDifference({ amount }: { amount: string }) {
+  if (Number(amount) === 0) return '–';
+  const dearer = Number(amount) > 0;
+  return (
+    <span className={dearer ? 'font-semibold text-oxblood' : undefined}>
+      {`${dearer ? '+' : ''}${moneyText(amount)}`}
+    </span>
+  );
+}
+
+function columnsFor(
+  { areaUnit, currency, today }: Workshop,
+  order: PurchaseOrder,
+  onChangeDay: ((line: PurchaseLine) => void) | undefined,
+): Column<PurchaseLine>[] {
   return [
     {
       id: 'name',
@@ -49,30 +87,59 @@ function columnsFor(
       id: 'ordered',
       header: 'Ordered',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => quantity(row.areaMm2, row.quantity),
+      cell: (row) => goodsText(row, areaUnit),
       align: 'right',
     },
     {
       id: 'received',
       header: 'Received',
       value: (row) => row.receivedAreaMm2 ?? row.received,
-      cell: (row) => quantity(row.receivedAreaMm2, row.received),
+      cell: ({ receivedAreaMm2, received }) =>
+        goodsText({ areaMm2: receivedAreaMm2, quantity: received }, areaUnit),
       align: 'right',
     },
-    ...(total === undefined ? [] : prices),
+    {
+      id: 'rest',
+      header: 'Still to come',
+      value: (row) => row.toCome.areaMm2 ?? row.toCome.quantity,
+      cell: (row) => (
+        <LineProgress
+          line={row}
+          order={order}
+          today={today}
+          onChangeDay={onChangeDay && (() => onChangeDay(row))}
+        />
+      ),
+    },
+    ...(order.total === undefined ? [] : priceColumns(currency, order)),
   ];
 }
 
-export function PurchaseLinesTable({ order }: { order: PurchaseOrder }) {
+interface PurchaseLinesTableProps {
+  order: PurchaseOrder;
+  isOwner: boolean;
+}
+
+/** What is ordered, what of it came, and what it cost against its price. */
+export function PurchaseLinesTable({ order, isOwner }: PurchaseLinesTableProps) {
   const workshop = useWorkshop();
-  const columns = useMemo(() => columnsFor(workshop, order.total), [workshop, order.total]);
+  const [moving, setMoving] = useState<PurchaseLine>();
+  const columns = useMemo(
+    () => columnsFor(workshop, order, isOwner ? setMoving : undefined),
+    [workshop, order, isOwner],
+  );
   return (
-    <DataTable
-      label={`Lines of ${order.number}`}
-      rows={order.lines}
-      rowId={(row) => row.id}
-      columns={columns}
-      empty={<EmptyState title="Nothing is ordered yet." />}
-    />
+    <>
+      <DataTable
+        label={`Lines of ${order.number}`}
+        rows={order.lines}
+        rowId={(row) => row.id}
+        columns={columns}
+        empty={<EmptyState title="Nothing is ordered yet." />}
+      />
+      {moving && (
+        <AwaitedDayDialog order={order} line={moving} onClose={() => setMoving(undefined)} />
+      )}
+    </>
   );
 }

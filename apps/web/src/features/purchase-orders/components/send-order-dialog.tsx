@@ -17,11 +17,11 @@ export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogPr
   const cards = [
     ...(supplierEmail === ''
       ? []
-      : [{ value: 'mail', label: 'By e-mail', detail: `to ${supplierEmail}` }]),
+      : [{ value: 'mail', label: 'By e-mail', detail: `to ${supplierEmail}, with the PDF` }]),
     {
       value: 'hand',
       label: 'By hand',
-      detail: 'by telephone, in their shop, or on paper: I have done it',
+      detail: 'by telephone, in their shop, or with the PDF: I have done it',
     },
   ];
   return (

@@ -1,11 +1,15 @@
 import { receiveDelivery, type PurchaseOrder, type ReplyOf } from '@hidewright/contract';
+import { useState } from 'react';
 import { Checkbox } from '../../../components/checkbox.tsx';
 import { DayField } from '../../../components/day-field.tsx';
 import { Form } from '../../../components/form.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
+import { ApiProblem } from '../../../lib/api-problem.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { useReceiveDelivery } from '../stock.mutations.ts';
+import { useReceiveDelivery } from '../receiving.mutations.ts';
 import type { TypedDelivery } from '../typed-delivery.ts';
+import { CarriageFields } from './carriage-fields.tsx';
+import { LookAgain } from './look-again.tsx';
 import { ReceivedHardwareList } from './received-hardware-list.tsx';
 import { ReceivedLotList } from './received-lot-list.tsx';
 
@@ -14,17 +18,33 @@ interface ReceiveFormProps {
   defaults: TypedDelivery;
   leathers: readonly Choice[];
   hardware: readonly Choice[];
+  /** How far a side may miss its mark, in per cent. */
+  tolerancePercent: string;
   /** Whether the person may say what it cost. */
   mayPrice: boolean;
   onReceived: (received: ReplyOf<typeof receiveDelivery>) => void;
+  /** Reads the order again, after somebody else received of it. */
+  onLookAgain: () => Promise<PurchaseOrder | undefined>;
 }
 
 /** What a supplier brought, made for one thumb: a lot a card, counts that are already there. */
 export function ReceiveForm(props: ReceiveFormProps) {
-  const { order, defaults, leathers, hardware, mayPrice, onReceived } = props;
+  const { order, defaults, leathers, hardware, tolerancePercent, mayPrice } = props;
   const send = useReceiveDelivery();
   const { today } = useWorkshop();
+  const [beaten, setBeaten] = useState(false);
   const lines = order?.lines ?? [];
+
+  async function receive(body: TypedDelivery) {
+    setBeaten(false);
+    try {
+      props.onReceived(await send.mutateAsync({ body }));
+    } catch (error) {
+      setBeaten(error instanceof ApiProblem && error.allowed.includes('look again'));
+      throw error;
+    }
+  }
+
   return (
     <Form
       schema={receiveDelivery.body}
@@ -32,9 +52,15 @@ export function ReceiveForm(props: ReceiveFormProps) {
       submitWord="Put it on the rack"
       submitSize="bench"
       draftKey={`receive-${order?.id ?? 'without-order'}`}
-      onSend={async (body) => onReceived(await send.mutateAsync({ body }))}
+      onSend={receive}
     >
-      <ReceivedLotList lines={lines} leathers={leathers} mayPrice={mayPrice} />
+      {beaten && <LookAgain onLookAgain={props.onLookAgain} onLooked={() => setBeaten(false)} />}
+      <ReceivedLotList
+        lines={lines}
+        leathers={leathers}
+        tolerancePercent={tolerancePercent}
+        mayPrice={mayPrice}
+      />
       <ReceivedHardwareList lines={lines} hardware={hardware} mayPrice={mayPrice} />
       {order && (
         <Checkbox
@@ -44,6 +70,7 @@ export function ReceiveForm(props: ReceiveFormProps) {
         />
       )}
       <DayField name="receivedOn" label="Came on" max={today} />
+      {mayPrice && <CarriageFields />}
     </Form>
   );
 }

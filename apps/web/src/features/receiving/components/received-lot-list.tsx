@@ -1,31 +1,37 @@
 import type { PurchaseLine } from '@hidewright/contract';
 import { Plus } from 'lucide-react';
-import { useFieldArray } from 'react-hook-form';
+import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
 import { areaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { blankLot, isOpen, openOf, type TypedLot } from '../typed-delivery.ts';
+import { blankLot, isOpen, nextLot, type TypedLot } from '../typed-delivery.ts';
 import { ReceivedLot } from './received-lot.tsx';
 
 interface ReceivedLotListProps {
   lines: readonly PurchaseLine[];
   leathers: readonly Choice[];
+  tolerancePercent: string;
   mayPrice: boolean;
 }
 
 /** The lots that came, each a card; of an order, one press adds another lot of the same leather. */
-export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListProps) {
+export function ReceivedLotList(props: ReceivedLotListProps) {
+  const { lines, leathers, tolerancePercent, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
   const { areaUnit } = useWorkshop();
   const open = lines.filter((line) => line.of === 'leather' && isOpen(line));
-  const add = (lot: TypedLot) =>
-    append(lot, { focusName: `lots.${fields.length}.measuredAreaMm2` });
+  const { getValues } = useFormContext<{ lots: TypedLot[] }>();
 
-  function toCome(line: PurchaseLine): string {
-    const rest = openOf(line);
-    return 'areaMm2' in rest ? `${areaText(rest.areaMm2, areaUnit)} to come` : '';
+  function addOf(line: PurchaseLine) {
+    const before = getValues('lots').findLast((lot) => lot.purchaseLineId === line.id);
+    append(nextLot(before, blankLot(line.leatherId ?? undefined, line.id)), {
+      focusName: `lots.${fields.length}.markedAreaMm2`,
+    });
   }
+
+  const toCome = ({ toCome: { areaMm2 } }: PurchaseLine) =>
+    areaMm2 === null ? '' : `${areaText(areaMm2, areaUnit)} to come`;
 
   return (
     <fieldset>
@@ -39,6 +45,7 @@ export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListPr
               at={at}
               ordered={line && { name: line.name, toCome: toCome(line) }}
               leathers={leathers}
+              tolerancePercent={tolerancePercent}
               mayPrice={mayPrice}
               onRemove={() => remove(at)}
             />
@@ -47,11 +54,7 @@ export function ReceivedLotList({ lines, leathers, mayPrice }: ReceivedLotListPr
       </div>
       <div className="mt-3 flex flex-wrap gap-2">
         {open.map((line) => (
-          <Button
-            key={line.id}
-            className="min-h-11"
-            onClick={() => add(blankLot(line.leatherId ?? undefined, line.id))}
-          >
+          <Button key={line.id} className="min-h-11" onClick={() => addOf(line)}>
             <Plus size={18} aria-hidden="true" /> A lot of {line.name}
           </Button>
         ))}

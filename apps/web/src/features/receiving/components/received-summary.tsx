@@ -1,19 +1,43 @@
 import type { receiveDelivery, ReplyOf } from '@hidewright/contract';
 import { Card } from '../../../components/card.tsx';
+import { Notice } from '../../../components/notice.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { areaText, countText } from '../../../lib/formatting.ts';
+import type { AreaUnit } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
-/** What is on the rack now, with the tags to hang on it. */
+function overOf(received: ReplyOf<typeof receiveDelivery>, unit: AreaUnit): string[] {
+  const lines = received.purchaseOrder?.lines ?? [];
+  return lines.flatMap(({ name, over: { areaMm2, quantity } }) => {
+    if (quantity !== null && quantity > 0) return [`${name}: ${countText(quantity)} over`];
+    if (areaMm2 !== null && Number(areaMm2) > 0)
+      return [`${name}: ${areaText(areaMm2, unit)} over`];
+    return [];
+  });
+}
+
+/** What is on the rack now, with the tags to hang on it, and what the owner should know of it. */
 export function ReceivedSummary({ received }: { received: ReplyOf<typeof receiveDelivery> }) {
   const { areaUnit } = useWorkshop();
-  const { lots, hardware } = received;
+  const { lots, hardware, receipt } = received;
+  const short = receipt?.lines.filter((line) => line.marked?.short) ?? [];
+  const over = overOf(received, areaUnit);
   return (
     <Card
-      title="On the rack"
+      title={lots.length + hardware.length > 0 ? 'On the rack' : 'Nothing more is awaited'}
       subtitle={lots.length > 0 ? 'Hang these tags on the leather:' : undefined}
     >
+      {short.length > 0 && (
+        <Notice tone="attention" title="Short of the mark:" className="mb-4">
+          {short.map((line) => line.lotTag).join(', ')}. The owner sees it with the order.
+        </Notice>
+      )}
+      {over.length > 0 && (
+        <Notice title="More than was ordered." className="mb-4">
+          {over.join('; ')}.
+        </Notice>
+      )}
       <ul className="space-y-3">
         {lots.map((lot) => (
           <li key={lot.id}>

@@ -5,8 +5,9 @@ import { Button } from '../../../components/button.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
+import { TextField } from '../../../components/text-field.tsx';
 import { countText } from '../../../lib/formatting.ts';
-import { blankHardware, isOpen, openOf, type TypedHardware } from '../typed-delivery.ts';
+import { blankHardware, isOpen, type TypedHardware } from '../typed-delivery.ts';
 
 interface ReceivedHardwareListProps {
   lines: readonly PurchaseLine[];
@@ -69,10 +70,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
   );
 }
 
-function restOf(line: PurchaseLine): number | undefined {
-  const open = openOf(line);
-  return 'quantity' in open ? open.quantity : undefined;
-}
+const restOf = (line: PurchaseLine) => line.toCome.quantity ?? undefined;
 
 interface ReceivedHardwareProps {
   at: number;
@@ -118,7 +116,8 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
           />
         )}
         <NumberField name={`${row}.quantity`} label="Came" unit="pieces" />
-        {mayPrice && !line && (
+        <TextField name={`${row}.batch`} label="Batch" optional help="As printed on the bag." />
+        {mayPrice && (
           <MoneyField
             name={`${row}.cost`}
             label="Cost of all"

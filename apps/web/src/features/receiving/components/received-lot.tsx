@@ -8,6 +8,8 @@ import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
+import { MarkCheck } from './mark-check.tsx';
+import { TagField } from './tag-field.tsx';
 
 const forms = lotForms.map((form) => ({ value: form, label: form }));
 /** What comes in bundles, cut to a size. */
@@ -18,12 +20,14 @@ interface ReceivedLotProps {
   /** The line of the order that it belongs to. */
   ordered: { name: string; toCome: string } | undefined;
   leathers: readonly Choice[];
+  tolerancePercent: string;
   mayPrice: boolean;
   onRemove: () => void;
 }
 
 /** One lot: what must be said of it in sight, the rest behind one press. */
-export function ReceivedLot({ at, ordered, leathers, mayPrice, onRemove }: ReceivedLotProps) {
+export function ReceivedLot(props: ReceivedLotProps) {
+  const { at, ordered, leathers, tolerancePercent, mayPrice, onRemove } = props;
   const lot = `lots.${at}`;
   const form = useWatch({ name: `${lot}.form` }) as LotForm;
   return (
@@ -58,10 +62,14 @@ export function ReceivedLot({ at, ordered, leathers, mayPrice, onRemove }: Recei
           />
         )}
         <AreaField
-          name={`${lot}.measuredAreaMm2`}
-          label="Measured area"
-          help="As marked on the flesh side: 24.75 or 24³."
+          name={`${lot}.markedAreaMm2`}
+          label="Marked area"
+          optional
+          whenEmpty="null"
+          help="As stamped on it: 24.75 or 24³."
         />
+        <AreaField name={`${lot}.measuredAreaMm2`} label="Measured area" help="As measured here." />
+        <MarkCheck lot={lot} tolerancePercent={tolerancePercent} />
         <SelectField name={`${lot}.form`} label="Form" choices={forms} />
         {cutToSize.includes(form) && (
           <>
@@ -70,14 +78,16 @@ export function ReceivedLot({ at, ordered, leathers, mayPrice, onRemove }: Recei
             <LengthField name={`${lot}.heightMm`} label="Height of one" optional whenEmpty="null" />
           </>
         )}
+        <TextField name={`${lot}.shade`} label="Shade" optional />
         <TextField name={`${lot}.place`} label="Place" optional />
+        <TagField name={`${lot}.tag`} />
       </div>
       <MoreOfLot lot={lot} mayPrice={mayPrice} />
     </div>
   );
 }
 
-const furtherFields = ['tag', 'shade', 'grade', 'supplierLot', 'cost'];
+const furtherFields = ['grade', 'supplierLot', 'cost'];
 
 /** Opens by itself where something in it must be put right. */
 function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
@@ -93,17 +103,10 @@ function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
         aria-expanded={open}
         onClick={() => setAsked(!open)}
       >
-        {open ? 'Less' : mayPrice ? 'Tag, shade, grade, cost' : 'Tag, shade, grade'}
+        {open ? 'Less' : mayPrice ? 'Grade, supplier’s lot, cost' : 'Grade, supplier’s lot'}
       </Button>
       {open && (
         <div className="mt-2 grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
-          <TextField
-            name={`${lot}.tag`}
-            label="Tag"
-            optional
-            help="Left empty, the next number is drawn."
-          />
-          <TextField name={`${lot}.shade`} label="Shade" optional />
           <TextField name={`${lot}.grade`} label="Grade" optional />
           <TextField name={`${lot}.supplierLot`} label="Supplier’s lot" optional />
           {mayPrice && (
@@ -112,7 +115,7 @@ function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
               label="Cost of the lot"
               optional
               whenEmpty="null"
-              help="Left empty, it is worked out from the price per ft²."
+              help="Left empty, it is the marked area at the price per ft²; without a mark, the measured one."
             />
           )}
         </div>

@@ -1,0 +1,75 @@
+import type { SupplierClaim } from '@hidewright/contract';
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { Card } from '../../../components/card.tsx';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { areaText, instantText, moneyText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { claimsQuery } from '../purchase-orders.queries.ts';
+import { CloseClaimDialog } from './close-claim-dialog.tsx';
+
+/** What was claimed on an order, and what became of it; nothing while nothing was. */
+export function ClaimsCard({ orderId, isOwner }: { orderId: number; isOwner: boolean }) {
+  const { data } = useQuery(claimsQuery(orderId));
+  if (!data || data.items.length === 0) return null;
+  return (
+    <Card title="Claims">
+      <ul className="divide-y divide-stitch">
+        {data.items.map((claim) => (
+          <li key={claim.id} className="py-3 first:pt-0 last:pb-0">
+            <Claim claim={claim} isOwner={isOwner} />
+          </li>
+        ))}
+      </ul>
+    </Card>
+  );
+}
+
+function Claim({ claim, isOwner }: { claim: SupplierClaim; isOwner: boolean }) {
+  const { areaUnit, currency, timeZone } = useWorkshop();
+  const [closing, setClosing] = useState<'credited' | 'given up'>();
+  const { missingAreaMm2, worth = '0', openedAt, sentBy } = claim;
+  return (
+    <div className="space-y-2">
+      <p className="flex flex-wrap items-center gap-x-3 gap-y-1">
+        <StateMark state={claim.state} />
+        <strong>{`${areaText(missingAreaMm2, areaUnit)} missing, worth ${currency} ${moneyText(worth)}`}</strong>
+      </p>
+      <p>
+        {claim.lots.map((lot, at) => (
+          <span key={lot.lotId}>
+            {at > 0 && ', '}
+            <TextLink to={`/stockroom/lots/${lot.lotId}`}>{lot.lotTag}</TextLink>
+            {` (${areaText(lot.measuredAreaMm2, areaUnit)} of ${areaText(lot.markedAreaMm2, areaUnit)})`}
+          </span>
+        ))}
+      </p>
+      <p className="text-sm text-ink-soft">
+        {`Claimed ${instantText(openedAt, timeZone)} ${sentBy === 'mail' ? 'by e-mail' : 'by hand'}.`}{' '}
+        <Outcome claim={claim} />
+      </p>
+      <details>
+        <summary className="rounded py-1">What was written</summary>
+        <p className="mt-2 max-w-prose whitespace-pre-line">{claim.text}</p>
+      </details>
+      {isOwner && claim.state === 'open' && (
+        <div className="flex flex-wrap gap-2">
+          <Button onClick={() => setClosing('credited')}>Note the credit</Button>
+          <Button onClick={() => setClosing('given up')}>Give it up</Button>
+        </div>
+      )}
+      {closing && (
+        <CloseClaimDialog claim={claim} as={closing} onClose={() => setClosing(undefined)} />
+      )}
+    </div>
+  );
+}
+
+function Outcome({ claim }: { claim: SupplierClaim }) {
+  const { currency } = useWorkshop();
+  if (claim.state === 'credited')
+    return `Credited: ${currency} ${moneyText(claim.credited ?? '0')}.`;
+  return claim.state === 'given up' ? `Given up: ${claim.note}.` : 'No answer yet.';
+}

@@ -1,0 +1,40 @@
+import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
+import { Button } from '../../../components/button.tsx';
+import { dayText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { goodsText, isNothing } from '../goods-text.ts';
+
+interface LineProgressProps {
+  line: PurchaseLine;
+  order: PurchaseOrder;
+  today: string;
+  onChangeDay: (() => void) | undefined;
+}
+
+/** What a line still lacks and by when, or what it ended over or short. */
+export function LineProgress({ line, order, today, onChangeDay }: LineProgressProps) {
+  const { areaUnit } = useWorkshop();
+  const { toCome, over, short, expectedOn } = line;
+  if (!isNothing(over)) return <strong>{`${goodsText(over, areaUnit)} over`}</strong>;
+  if (!isNothing(short))
+    return <strong className="text-brass">{`${goodsText(short, areaUnit)} short`}</strong>;
+  const awaited = order.state === 'sent' || order.state === 'part received';
+  if (!awaited) return '–';
+  if (isNothing(toCome)) return 'all here';
+  const late = expectedOn !== null && expectedOn < today;
+  return (
+    <span>
+      {goodsText(toCome, areaUnit)}
+      {expectedOn !== null && (
+        <span className={late ? 'block font-semibold text-oxblood' : 'block'}>
+          {`${late ? 'late: ' : 'by '}${dayText(expectedOn, today)}`}
+        </span>
+      )}
+      {onChangeDay && (
+        <Button tone="quiet" className="-ml-3.5" onClick={onChangeDay}>
+          Another day<span className="sr-only">{` for ${line.name}`}</span>
+        </Button>
+      )}
+    </span>
+  );
+}

@@ -1,0 +1,83 @@
+import type { PurchaseOrder, Receipt } from '@hidewright/contract';
+import { useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { Card } from '../../../components/card.tsx';
+import { Notice } from '../../../components/notice.tsx';
+import { dayText, moneyText, percentText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { ClaimDialog } from './claim-dialog.tsx';
+import { ReceiptCostsDialog } from './receipt-costs-dialog.tsx';
+import { ReceiptLinesTable } from './receipt-lines-table.tsx';
+
+const sharedWords = { value: 'by value', area: 'by area', count: 'by count' };
+
+interface ReceiptCardProps {
+  order: PurchaseOrder;
+  receipt: Receipt;
+  isOwner: boolean;
+}
+
+/** One delivery of an order: what came, what it cost to bring, and what is short of its mark. */
+export function ReceiptCard({ order, receipt, isOwner }: ReceiptCardProps) {
+  const { today } = useWorkshop();
+  const [asking, setAsking] = useState<'costs' | 'claim'>();
+  const close = () => setAsking(undefined);
+  const short = receipt.lines.filter((line) => line.marked?.short && line.claimId === null);
+  const { freight, duty } = receipt;
+  return (
+    <Card
+      title={`Came ${dayText(receipt.receivedOn, today)}`}
+      subtitle={`received by ${receipt.byName}`}
+      aside={
+        isOwner &&
+        receipt.untouched && (
+          <Button onClick={() => setAsking('costs')}>Put right what it cost</Button>
+        )
+      }
+    >
+      {short.length > 0 && (
+        <Notice
+          tone="attention"
+          className="mb-4"
+          title={
+            short.length === 1
+              ? 'One lot is short of its mark.'
+              : `${short.length} lots are short of their mark.`
+          }
+          actions={
+            isOwner && (
+              <Button tone="primary" onClick={() => setAsking('claim')}>
+                Claim it
+              </Button>
+            )
+          }
+        >
+          {short.map((line) => line.lotTag).join(', ')}: more than{' '}
+          {percentText(receipt.tolerancePercent)} smaller than marked.
+        </Notice>
+      )}
+      <ReceiptLinesTable receipt={receipt} />
+      {freight !== undefined && duty !== undefined && (
+        <Carriage freight={freight} duty={duty} sharedBy={sharedWords[receipt.sharedBy]} />
+      )}
+      {asking === 'costs' && <ReceiptCostsDialog receipt={receipt} onClose={close} />}
+      {asking === 'claim' && <ClaimDialog order={order} receipt={receipt} onClose={close} />}
+    </Card>
+  );
+}
+
+function Carriage(props: { freight: string; duty: string; sharedBy: string }) {
+  const { currency } = useWorkshop();
+  const { freight, duty, sharedBy } = props;
+  const parts = [
+    ...(Number(freight) > 0 ? [`freight ${moneyText(freight)}`] : []),
+    ...(Number(duty) > 0 ? [`duty ${moneyText(duty)}`] : []),
+  ];
+  if (parts.length === 0)
+    return <p className="mt-3 text-sm text-ink-soft">No freight or duty is noted.</p>;
+  return (
+    <p className="mt-3 text-sm text-ink-soft">
+      {`In the cost, ${currency}: ${parts.join(' and ')}, shared out ${sharedBy}.`}
+    </p>
+  );
+}
