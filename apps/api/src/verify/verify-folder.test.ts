@@ -81,7 +81,7 @@ describe('verifying a data folder', () => {
     [
       'what came on an order line',
       'UPDATE purchase_line SET received = received - 1 WHERE received > 0',
-      'what was received on it',
+      'what came on it',
     ],
     [
       'what was counted',
@@ -136,6 +136,26 @@ describe('verifying a data folder', () => {
       'a locked period',
       `UPDATE period SET totals = json_set(totals, '$.net', '1.00') WHERE id = 2`,
       'locked at',
+    ],
+    [
+      'the freight of a delivery',
+      'UPDATE receipt SET freight = freight + 1 WHERE freight > 0',
+      'borne by its lines',
+    ],
+    [
+      'what came with a delivery',
+      'UPDATE receipt_line SET goods = goods + 1 WHERE id = 1',
+      'stands in the ledger',
+    ],
+    [
+      'a delivery left out',
+      'UPDATE purchase_order SET receipts = 0 WHERE id = 1',
+      'its deliveries',
+    ],
+    [
+      'a claim',
+      'UPDATE supplier_claim SET missing_area_mm2 = missing_area_mm2 + 1',
+      'short of their mark',
     ],
     ['a layout', 'UPDATE layout SET pieces = pieces + 1 WHERE id = 1', 'those that it draws'],
   ])('notices %s that was altered', async (_what, sql, says) => {

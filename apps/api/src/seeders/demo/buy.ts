@@ -1,10 +1,16 @@
-import { convert } from '@hidewright/domain';
+import { addDays, convert } from '@hidewright/domain';
+import { draftClaim } from '../../flows/draft-claim.ts';
+import { openClaim } from '../../flows/open-claim.ts';
 import { putPurchaseOrderOnPaper } from '../../flows/put-purchase-order-on-paper.ts';
 import { receiveDelivery } from '../../flows/receive-delivery.ts';
 import { sendPurchaseOrder } from '../../flows/send-purchase-order.ts';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
-import { draftPurchaseOrder } from '../../modules/purchase-orders/draft-purchase-order.ts';
+import { awaitLineOn } from '../../modules/purchase-orders/await-line-on.ts';
+import {
+  draftPurchaseOrder,
+  findPurchaseOrder,
+} from '../../modules/purchase-orders/draft-purchase-order.ts';
 import { PurchaseLine } from '../../modules/purchase-orders/purchase-line.entity.ts';
 import { priceText } from '../../http/decimal-text.ts';
 import type { Work } from '../../work.ts';
@@ -24,12 +30,41 @@ export function planPurchases(shop: DemoShop, year: Year, furnished: Furnished):
     year.plan(purchase.daysBefore + leadDays, '08:20', async () => {
       orderId = await order(shop, furnished, purchase, year.day(purchase.daysBefore));
     });
-    year.plan(purchase.daysBefore, '11:15', () =>
-      shop.as('maker', (work) => receive(work, furnished, purchase, orderId)),
-    );
+    year.plan(purchase.daysBefore, '11:15', async () => {
+      // The maker takes deliveries in; the owner does where the carrier's paper came along.
+      const by = purchase.freight === undefined ? 'maker' : 'owner';
+      const { receiptId } = await shop.as(by, (work) =>
+        receive(work, furnished, purchase, orderId),
+      );
+      await afterwards(shop, year, purchase, { orderId, receiptId });
+    });
   }
   year.plan(onItsWay.daysBefore, '08:40', async () => {
     await order(shop, furnished, onItsWay, year.end);
+  });
+}
+
+/** What is short is claimed, and the supplier names a day for the rest. */
+async function afterwards(
+  shop: DemoShop,
+  year: Year,
+  purchase: Purchase,
+  { orderId, receiptId }: { orderId: number; receiptId: number | null },
+): Promise<void> {
+  const { leather = [], restInDays } = purchase;
+  if (receiptId !== null && leather.some(({ markedFt2 }) => markedFt2 !== undefined)) {
+    await shop.as('owner', async (work) => {
+      const { text } = await draftClaim(work, receiptId);
+      await openClaim(work, { receiptId, by: 'mail', text, mailIsSet: true });
+    });
+  }
+  if (restInDays === undefined) return;
+  await shop.as('owner', async (work) => {
+    const order = await findPurchaseOrder(work, orderId);
+    const lines = await work.em.find(PurchaseLine, { purchaseOrderId: orderId });
+    const expectedOn = addDays(year.end, restInDays);
+    for (const { id: lineId } of lines.filter((line) => line.received < line.quantity))
+      await awaitLineOn(work, order, { lineId, expectedOn });
   });
 }
 
@@ -80,32 +115,35 @@ async function receive(
   furnished: Furnished,
   purchase: Purchase,
   purchaseOrderId: number,
-): Promise<void> {
+) {
   const open = await work.em.find(PurchaseLine, { purchaseOrderId });
-  const lots = (purchase.leather ?? []).flatMap(({ name, form, areasFt2, shade }) => {
+  const lots = (purchase.leather ?? []).flatMap(({ name, form, areasFt2, markedFt2, shade }) => {
     const leatherId = furnished.leathers.id(name);
     const purchaseLineId = open.find((line) => line.leatherId === leatherId)?.id ?? null;
-    return areasFt2.map((ft2) => ({
+    return areasFt2.map((ft2, at) => ({
       ...blankLot,
       leatherId,
       purchaseLineId,
       form,
       measuredAreaMm2: areaOf(ft2),
+      markedAreaMm2: markedFt2?.[at] === undefined ? null : areaOf(markedFt2[at]),
       shade,
     }));
   });
-  const hardware = (purchase.hardware ?? []).map(({ name, quantity }) => {
-    const hardwareId = furnished.hardware.id(name);
-    const purchaseLineId = open.find((line) => line.hardwareId === hardwareId)?.id ?? null;
-    return { hardwareId, purchaseLineId, quantity, batch: '', cost: null };
-  });
-  await receiveDelivery(work, {
+  const hardware = (purchase.hardware ?? []).map(
+    ({ name, quantity, came = quantity, batch = '' }) => {
+      const hardwareId = furnished.hardware.id(name);
+      const purchaseLineId = open.find((line) => line.hardwareId === hardwareId)?.id ?? null;
+      return { hardwareId, purchaseLineId, quantity: came, batch, cost: null };
+    },
+  );
+  return receiveDelivery(work, {
     purchaseOrderId,
     receivedOn: work.today,
     lots,
     hardware,
     receiptsSeen: null,
-    freight: '0.00',
+    freight: purchase.freight ?? '0.00',
     duty: '0.00',
     sharedBy: 'value',
     nothingMore: false,
@@ -114,7 +152,6 @@ async function receive(
 
 const blankLot = {
   tag: '',
-  markedAreaMm2: null,
   pieces: 1,
   widthMm: null,
   heightMm: null,

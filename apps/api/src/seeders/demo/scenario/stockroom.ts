@@ -162,8 +162,19 @@ export type HardwareName = (typeof hardware)[number]['name'];
 interface Purchase {
   daysBefore: number;
   supplier: SupplierName;
-  leather?: { name: LeatherName; form: LotForm; areasFt2: string[]; shade: string }[];
-  hardware?: { name: HardwareName; quantity: number }[];
+  leather?: {
+    name: LeatherName;
+    form: LotForm;
+    areasFt2: string[];
+    /** As the tannery stamped them on, in the same order. */
+    markedFt2?: string[];
+    shade: string;
+  }[];
+  hardware?: { name: HardwareName; quantity: number; batch?: string; came?: number }[];
+  /** What it cost to bring, typed by the owner. */
+  freight?: string;
+  /** What is still to come is awaited so many days after the year's end. */
+  restInDays?: number;
 }
 
 export const purchases: Purchase[] = [
@@ -263,9 +274,31 @@ export const purchases: Purchase[] = [
   {
     daysBefore: 31,
     supplier: 'Oldbeck Tannery',
+    freight: '18.40',
     leather: [
-      { name: 'Oak tan russet 5–6 oz', form: 'side', areasFt2: ['24.4'], shade: 'red-brown' },
-      { name: 'Oak tan natural 7–8 oz', form: 'side', areasFt2: ['22.6', '23.2'], shade: 'pale' },
+      {
+        name: 'Oak tan russet 5–6 oz',
+        form: 'side',
+        areasFt2: ['24.4'],
+        markedFt2: ['24.5'],
+        shade: 'red-brown',
+      },
+      {
+        name: 'Oak tan natural 7–8 oz',
+        form: 'side',
+        areasFt2: ['22.6', '23.2'],
+        markedFt2: ['23.5', '23.25'],
+        shade: 'pale',
+      },
+    ],
+  },
+  {
+    daysBefore: 9,
+    supplier: 'Fennbridge Fittings',
+    restInDays: 6,
+    hardware: [
+      { name: 'Card sleeves, kraft', quantity: 500, came: 500 },
+      { name: 'D-rings 25 mm, solid brass', quantity: 250, came: 100, batch: 'DR-2611' },
     ],
   },
 ];
