@@ -121,6 +121,11 @@ export * from './buying/line-progress.ts';
 
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';
+export type { Bench, WorkPart } from './promise/bench-time.ts';
+export type { HeldWork } from './promise/held-work.ts';
+export { doneOn } from './promise/elapsed-days.ts';
+export { planDays } from './promise/plan-days.ts';
+export type { PlannedDay } from './promise/plan-days.ts';
 export * from './promise/bench-plan.ts';
 export * from './promise/late-jobs.ts';
 export * from './promise/two-machine.ts';

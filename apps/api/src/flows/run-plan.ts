@@ -1,4 +1,12 @@
-import { benchMinutes, priceRun, ticketSteps, toAtMost, type RunInput } from '@hidewright/domain';
+import {
+  benchMinutes,
+  priceRun,
+  ticketSteps,
+  toAtMost,
+  waitAfter,
+  type RunInput,
+  type WorkPart,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { throughKits } from '../modules/hardware/kits.ts';
@@ -28,6 +36,8 @@ export interface RunPlan {
   hardware: { hardwareId: number; quantity: number }[];
   steps: PlannedStep[];
   plannedMinutes: Decimal;
+  /** The same minutes with the waits between them, in hundredths of a minute. */
+  parts: WorkPart[];
   needsDie: boolean;
   needsPlate: boolean;
   /** The run as it was priced, with this one quantity. */
@@ -74,6 +84,10 @@ export async function planRun(
       })),
     ),
     plannedMinutes: steps.reduce((sum, step) => sum.plus(step.plannedMinutes), new Decimal(0)),
+    parts: ticketSteps(input.work).map((step, at) => ({
+      minutes: steps[at]?.plannedMinutes.times(100).toNumber() ?? 0,
+      waitAfter: waitAfter(step),
+    })),
   };
 }
 

@@ -1,14 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import {
-  earliestDay,
-  freeUntil,
-  planDays,
-  shortByPromise,
-  type Bench,
-  type HeldWork,
-} from './bench-plan.ts';
+import { earliestDay, freeUntil, latestStart, shortByPromise } from './bench-plan.ts';
+import type { Bench } from './bench-time.ts';
 import { addDays } from './day.ts';
+import type { HeldWork } from './held-work.ts';
+import { planDays } from './plan-days.ts';
 
 /** Tuesday; 6 hours a day. */
 const bench: Bench = { today: '2026-12-01', perDay: 36_000, loggedToday: 0 };
@@ -90,6 +86,49 @@ describe('earliestDay', () => {
 
   it('is none where the shop has no hours', () =>
     expect(earliestDay({ ...bench, perDay: 0 }, [], 1)).toBeNull());
+});
+
+describe('a run that can begin only later', () => {
+  it('has its own days alone, and what is promised before them is done before them', () => {
+    expect(freeUntil(bench, [], '2026-12-04', '2026-12-03')).toBe(72_000);
+    expect(freeUntil(bench, [held(1, '2026-12-04', 72_000)], '2026-12-04', '2026-12-03')).toBe(
+      72_000,
+    );
+    expect(freeUntil(bench, [held(1, '2026-12-04', 80_000)], '2026-12-04', '2026-12-03')).toBe(
+      64_000,
+    );
+    expect(earliestDay(bench, [], 36_001, { from: '2026-12-04' })).toBe('2026-12-07');
+  });
+
+  it('knows the last day on which it may begin', () => {
+    const run = { minutes: 36_001, parts: [{ minutes: 36_001, waitAfter: 0 }], by: '2026-12-07' };
+    expect(latestStart(bench, [], run)).toBe('2026-12-04');
+    expect(latestStart(bench, [held(1, '2026-12-07', 150_000)], run)).toBeNull();
+  });
+
+  it('is in time on the last day, and not a day later', () => {
+    const parts = fc.array(
+      fc.record({
+        minutes: fc.integer({ min: 1, max: 50_000 }),
+        waitAfter: fc.constantFrom(0, 6_000, 200_000),
+      }),
+      { minLength: 1, maxLength: 4 },
+    );
+    fc.assert(
+      fc.property(parts, fc.integer({ min: 0, max: 40 }), (all, days) => {
+        const minutes = all.reduce((sum, part) => sum + part.minutes, 0);
+        const by = addDays(bench.today, days);
+        const start = latestStart(bench, [], { minutes, parts: all, by });
+        const endOf = (from: string) =>
+          earliestDay(bench, [], minutes, { from, parts: all }) ?? '9';
+        if (start === null) expect(endOf(bench.today) > by).toBe(true);
+        else {
+          expect(freeUntil(bench, [], by, start)).toBeGreaterThanOrEqual(minutes);
+          expect(endOf(addDays(start, 1)) > by || start === by).toBe(true);
+        }
+      }),
+    );
+  });
 });
 
 describe('promises', () => {

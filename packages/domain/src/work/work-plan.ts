@@ -1,5 +1,5 @@
 import { InvalidInput } from '../errors/domain-error.ts';
-import { type DecimalText, readDecimal, readWhole } from '../numbers/decimal-text.ts';
+import { type DecimalText, Exact, readDecimal, readWhole } from '../numbers/decimal-text.ts';
 import type { LearningModel } from './learning.ts';
 
 /** What a step's seconds are counted per. */
@@ -67,6 +67,11 @@ export function ticketSteps(plan: WorkPlan): WorkStep[] {
       rejectPercent: plan.rejectPercent,
     },
   ];
+}
+
+/** How long the pieces must lie after a step, in hundredths of a minute, rounded up; 0 where nothing is said. */
+export function waitAfter(step: Pick<WorkStep, 'shortestWait'> | undefined): number {
+  return step?.shortestWait ? new Exact(step.shortestWait).times(100).ceil().toNumber() : 0;
 }
 
 /** Refuses times below zero, rejects outside 0 to below 100 %, and a plan without steps. @throws InvalidInput */

@@ -19,8 +19,9 @@ export function BenchCalendar({ hours }: { hours: BenchHours }) {
           className="mb-3"
           title={`${job.number} ${job.title}:`}
         >
-          {hoursText(job.minutesShort)} short by {dayText(job.promisedOn, today)}. Move it, or work
-          longer.
+          {Number(job.minutesShort) > 0
+            ? `${hoursText(job.minutesShort)} short by ${dayText(job.promisedOn, today)}. Move it, or work longer.`
+            : `its pieces must lie beyond ${dayText(job.promisedOn, today)}. Promise a later day.`}
         </Notice>
       ))}
       <table className="w-full">
