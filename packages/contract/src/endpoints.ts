@@ -1,6 +1,7 @@
 import * as activity from './activity.ts';
 import * as benchHours from './bench-hours.ts';
 import * as counts from './counts.ts';
+import * as checks from './checks.ts';
 import * as customers from './customers.ts';
 import * as cutAdvice from './cut-advice.ts';
 import * as designs from './designs.ts';
@@ -56,6 +57,7 @@ const rooms: Record<string, unknown>[] = [
   quotes,
   links,
   orders,
+  checks,
   patterns,
   learned,
   timeReadings,

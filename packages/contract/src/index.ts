@@ -1,5 +1,6 @@
 export * from './activity.ts';
 export * from './bench-hours.ts';
+export * from './checks.ts';
 export * from './confidential.ts';
 export * from './counts.ts';
 export * from './customers.ts';

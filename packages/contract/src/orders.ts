@@ -10,7 +10,6 @@ import {
   page,
   pageQuery,
   paperNumber,
-  runQuantity,
   version,
 } from './fields.ts';
 
@@ -32,51 +31,6 @@ export type OrderState = z.infer<typeof orderState>;
 /** What can still be awaited after an order is taken on; several at once. */
 export const awaited = z.enum(['proof', 'deposit', 'tooling'], 'Choose proof, deposit or tooling.');
 export type Awaited = z.infer<typeof awaited>;
-
-/** One question of *Can we make it?*, answered from what is on hand and free. No prices in it. */
-const checkAnswer = z
-  .object({
-    about: z.enum(['leather', 'hardware', 'tooling', 'hours']),
-    /** What it is about: a leather, a kind of rivet, the cutting die, the bench. */
-    name: z.string(),
-    unit: z.enum(['mm2', 'piece', 'strike', 'minute']),
-    /** Exact decimals in the unit. */
-    needed: z.string(),
-    free: z.string(),
-    /** What is missing; "0" where there is enough. */
-    short: z.string(),
-    enough: z.boolean(),
-    /** The answer in words; where something is short, it says what to do. */
-    sentence: z.string(),
-  })
-  .meta({ id: 'CheckAnswer' });
-export type CheckAnswer = z.infer<typeof checkAnswer>;
-
-/** The area that would come from one lot. */
-const checkLot = z.object({
-  lotId: id,
-  tag: z.string(),
-  place: z.string(),
-  freeAreaMm2: z.string(),
-  takesAreaMm2: z.string(),
-});
-
-export const runCheck = z
-  .object({
-    quantity: runQuantity,
-    /** The day by which it must be packed. */
-    by: day,
-    cutCount: count,
-    containers: count,
-    /** True when every answer has enough. */
-    yes: z.boolean(),
-    answers: z.array(checkAnswer),
-    lots: z.array(checkLot),
-    /** The first day by which the bench has the hours; null where none is free within a year. */
-    earliestDay: day.nullable(),
-  })
-  .meta({ id: 'RunCheck' });
-export type RunCheck = z.infer<typeof runCheck>;
 
 export const order = z
   .object({
@@ -122,21 +76,6 @@ export const order = z
 export type Order = z.infer<typeof order>;
 
 const everybody = ['owner', 'maker', 'bookkeeper'] as const;
-
-export const checkQuote = endpoint({
-  method: 'GET',
-  path: '/quotes/{id}/check',
-  summary:
-    'Can we make it? Leather, hardware, tooling and bench hours against what is free, by that day',
-  access: ['owner', 'maker'],
-  params: idParams,
-  query: z.strictObject({
-    quantity: z.coerce.number('Enter a quantity.').pipe(runQuantity).optional(),
-    by: day.optional(),
-    option: z.string().max(60).optional(),
-  }),
-  reply: runCheck,
-});
 
 export const listOrders = endpoint({
   method: 'GET',

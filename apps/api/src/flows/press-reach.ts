@@ -28,10 +28,15 @@ export async function pressReach(em: EntityManager): Promise<PressReach> {
 
 const spanOf = (values: readonly number[]): number => Math.max(...values) - Math.min(...values);
 
-const limitsOf = ({ bedDepthMm, bedWidthMm, throatMm }: Press): PressLimits => ({
+/** A press as far as reach and load go. */
+export const limitsOf = (press: Press): PressLimits => ({
+  ...bedOf(press),
+  ruleMm: press.ruleMm?.toNumber() ?? null,
+  reliefAreaMm2: press.reliefAreaMm2?.toNumber() ?? null,
+});
+
+const bedOf = ({ bedDepthMm, bedWidthMm, throatMm }: Press) => ({
   bedWidthMm: bedWidthMm.toNumber(),
   bedDepthMm: bedDepthMm.toNumber(),
   throatMm: throatMm?.toNumber() ?? null,
-  ruleMm: null,
-  reliefAreaMm2: null,
 });

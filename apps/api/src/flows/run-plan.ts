@@ -1,3 +1,4 @@
+import type { PatternDefinition } from '@hidewright/contract';
 import {
   benchMinutes,
   priceRun,
@@ -55,25 +56,33 @@ export async function planRun(
   option: string | null,
 ): Promise<RunPlan> {
   const version = await em.findOneOrFail(PatternVersion, quote.patternVersionId);
-  const { leatherId, hardware, needsDie, needsPlate } = definitionOf(version);
+  const { patternId } = version;
   const input = forOne(quote, quantity, option);
+  return planOf(em, input, { definition: definitionOf(version), patternId, quantity, option: null });
+}
+
+interface Planned {
+  definition: Pick<PatternDefinition, 'leatherId' | 'hardware' | 'needsDie' | 'needsPlate'>;
+  patternId: number;
+  quantity: number;
+  option: string | null;
+}
+
+/** The plan of a run with one quantity, with or without a quote. */
+export async function planOf(
+  em: EntityManager,
+  asked: RunInput,
+  { definition, patternId, quantity, option }: Planned,
+): Promise<RunPlan> {
+  const input = withOption(asked, option);
+  const { leatherId, hardware, needsDie, needsPlate } = definition;
   const [run] = priceRun(input).breaks;
   if (run === undefined) throw new TypeError('One quantity has one rung');
   const { cutCount, containers, leatherAreaMm2 } = run;
   const steps = planSteps(input, { pieces: cutCount, containers });
   return {
-    ...{
-      quantity,
-      cutCount,
-      containers,
-      leatherAreaMm2,
-      leatherId,
-      needsDie,
-      needsPlate,
-      steps,
-      input,
-    },
-    patternId: version.patternId,
+    ...{ quantity, cutCount, containers, leatherAreaMm2, leatherId, needsDie, needsPlate },
+    ...{ steps, input, patternId },
     // What a quote of before counts as one thing can be a kit by now.
     hardware: await throughKits(
       em,
@@ -91,19 +100,18 @@ export async function planRun(
   };
 }
 
+function withOption(input: RunInput, name: string | null): RunInput {
+  const option = input.options?.find((each) => each.name === name);
+  return { ...input, hardware: option?.hardware ?? input.hardware, options: [] };
+}
+
 /** At the price that was offered: alone, a rung could be suggested another than beside smaller and larger ones. */
 function forOne(quote: Quote, quantity: number, optionName: string | null): RunInput {
   const numbers = numbersOfQuote(quote);
   const input = quote.input as RunInput;
-  const option = input.options?.find(({ name }) => name === optionName);
   const breaks = rungsOf(numbers, optionName);
   const typedPrice = breaks.find((each) => each.quantity === quantity)?.priceEach ?? null;
-  return {
-    ...input,
-    hardware: option?.hardware ?? input.hardware,
-    options: [],
-    breaks: [{ quantity, typedPrice }],
-  };
+  return { ...withOption(input, optionName), breaks: [{ quantity, typedPrice }] };
 }
 
 /** Each step with its minutes, to the hundredth of a minute that a job keeps. */

@@ -3,7 +3,6 @@ import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { BreakNumbers } from '@hidewright/domain';
 import { drawPaperNumber } from '../db/counters.ts';
-import { scaled } from '../db/columns/scaled-decimal.ts';
 import { notFound, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { Job } from '../modules/jobs/job.entity.ts';
@@ -12,11 +11,13 @@ import { Order } from '../modules/orders/order.entity.ts';
 import { sortAwaits, stateAwaiting } from '../modules/orders/order-states.ts';
 import { Quote } from '../modules/quotes/quote.entity.ts';
 import { requirePossible } from '../modules/quotes/quote-states.ts';
-import { freeOf, reserveStock } from '../modules/stock/stock-ledger.ts';
+import { reserveStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
-import { checkPlan, requireReachable } from './check-run.ts';
+import { checkPlanned, type CheckedRun } from './check/checked-runs.ts';
+import { runReply, sayFor } from './check/run-reply.ts';
+import { planQuoted, requireReachable } from './check/runs-asked.ts';
 import { numbersOf, type JobEstimate } from './job-estimate.ts';
-import { planRun, type RunPlan } from './run-plan.ts';
+import type { RunPlan } from './run-plan.ts';
 
 export interface TakingOn {
   quoteId: number;
@@ -38,13 +39,16 @@ export async function takeOnOrder(work: Work, asked: TakingOn): Promise<Order> {
   await refuseTwice(work.em, quote);
   requirePossible(quote, 'take on');
   requireReachable(work, asked.promisedOn, 'promisedOn');
-  const plan = await planRun(work.em, quote, agreedQuantity(quote), quote.agreedOption);
-  const check = await checkPlan(work, plan, { by: asked.promisedOn, customerId: quote.customerId });
-  if (!asked.evenIfShort) refuseShort(check, asked.awaits);
+  const wanted = { quantity: agreedQuantity(quote), by: asked.promisedOn };
+  const planned = await planQuoted(work, quote, wanted);
+  const { plan } = planned;
+  const [checked] = (await checkPlanned(work, [planned])).runs;
+  if (checked === undefined) throw new TypeError('One run has one answer');
+  if (!asked.evenIfShort) refuseShort(runReply(checked, await sayFor(work.em)), asked.awaits);
   const estimate = toEstimate(plan);
   const order = await makeOrder(work, quote, asked, numbersOf(estimate));
   const job = await makeJob(work, quote, order, plan, estimate);
-  await holdStock(work, job, plan, check);
+  await holdStock(work, job, checked);
   return order;
 }
 
@@ -153,18 +157,16 @@ async function makeJob(
   return job;
 }
 
-/** Holds what is free of what is needed: all of it, unless the owner took it on although something is short. */
-async function holdStock(work: Work, job: Job, plan: RunPlan, check: RunCheck): Promise<void> {
-  for (const { lotId, takesAreaMm2 } of check.lots) {
-    await reserveStock(work, {
-      jobId: job.id,
-      lotId,
-      quantity: scaled(new Decimal(takesAreaMm2), 3),
-    });
+/**
+ * Holds what is free now of what is needed and promised to no other job; what comes later is taken when it is here, and
+ * until then it counts as promised.
+ */
+async function holdStock(work: Work, job: Job, { facts }: CheckedRun): Promise<void> {
+  for (const { lot, area } of facts.leather.takes) {
+    await reserveStock(work, { jobId: job.id, lotId: lot.lotId, quantity: area });
   }
-  for (const { hardwareId, quantity } of plan.hardware) {
-    const { free } = await freeOf(work.em, { hardwareId });
-    const held = Math.min(free, quantity);
-    if (held > 0) await reserveStock(work, { jobId: job.id, hardwareId, quantity: held });
+  for (const { item, now } of facts.items) {
+    if (now === 0) continue;
+    await reserveStock(work, { jobId: job.id, hardwareId: item.hardwareId, quantity: now });
   }
 }

@@ -1,16 +1,20 @@
-import type { FreeLot } from '@hidewright/domain';
+import { drawnAreaMm2, Exact, type LeatherStock } from '@hidewright/domain';
+import type { LotDrawing } from '@hidewright/contract';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
 import { StockBalance } from '../../modules/stock/stock-balance.entity.ts';
 
-/** A lot with something free on it, and where it lies. */
-export interface RackLot extends FreeLot {
+interface FreeLot {
+  lotId: number;
+  tag: string;
   place: string;
+  receivedOn: string;
+  freeAreaMm2: string;
 }
 
 /** The lots of a leather that still have something free. */
-export async function freeLotsOf(em: EntityManager, leatherId: number): Promise<RackLot[]> {
+export async function freeLotsOf(em: EntityManager, leatherId: number): Promise<FreeLot[]> {
   const lots = await em.find(Lot, { leatherId }, { orderBy: { id: 'asc' } });
   const balances = await em.find(StockBalance, { lotId: { $in: lots.map(({ id }) => id) } });
   return lots.flatMap(({ id, tag, place, receivedOn }) => {
@@ -20,4 +24,67 @@ export async function freeLotsOf(em: EntityManager, leatherId: number): Promise<
       ? [{ lotId: id, tag, place, receivedOn, freeAreaMm2: unscaled(free, 3).toString() }]
       : [];
   });
+}
+
+export interface LotRow {
+  id: number;
+  tag: string;
+  leather_id: number;
+  place: string;
+  shade: string;
+  received_on: string;
+  form: Lot['form'];
+  measured_area_mm2: number;
+  usable_percent: number;
+  width_mm: number | null;
+  height_mm: number | null;
+  outline: string | null;
+  flaws: string;
+  free: number;
+}
+
+/** Every lot of some leathers that has something free, oldest number first. */
+export function freeLotRows(em: EntityManager, leatherIds: readonly number[]): Promise<LotRow[]> {
+  return em.execute<LotRow[]>(
+    `SELECT l.id, l.tag, l.leather_id, l.place, l.shade, l.received_on, l.form, l.measured_area_mm2, l.usable_percent,
+      l.width_mm, l.height_mm, l.outline, l.flaws, b.on_hand - b.reserved AS free
+    FROM lot l JOIN stock_balance b ON b.lot_id = l.id
+    WHERE l.leather_id IN (SELECT value FROM json_each(?)) AND b.on_hand > b.reserved ORDER BY l.id`,
+    [JSON.stringify(leatherIds)],
+  );
+}
+
+export function toRackLot(row: LotRow): LeatherStock['lots'][number] {
+  return {
+    lotId: row.id,
+    tag: row.tag,
+    place: row.place,
+    shade: row.shade,
+    receivedOn: row.received_on,
+    freeAreaMm2: unscaled(row.free, 3).toFixed(),
+    measuredAreaMm2: unscaled(row.measured_area_mm2, 3).toFixed(),
+    usablePercent: unscaled(row.usable_percent, 4).toFixed(),
+    panel: panelOf(row),
+    drawnAreaMm2: drawnArea(row),
+  };
+}
+
+/** Ready panels and strips have straight sides; a whole side has none that a panel could be measured by. */
+function panelOf({ form, width_mm, height_mm }: LotRow) {
+  if ((form !== 'panel' && form !== 'strip') || width_mm === null || height_mm === null)
+    return null;
+  return {
+    widthMm: unscaled(width_mm, 6).toNumber(),
+    heightMm: unscaled(height_mm, 6).toNumber(),
+  };
+}
+
+function drawnArea({ outline, flaws }: LotRow): string | null {
+  if (outline === null) return null;
+  const gone = (JSON.parse(flaws) as LotDrawing['flaws']).reduce(
+    (sum, flaw) => sum + drawnAreaMm2(flaw),
+    0,
+  );
+  const left = drawnAreaMm2(JSON.parse(outline) as NonNullable<LotDrawing['outline']>) - gone;
+  return new Exact(Math.max(0, left)).toDecimalPlaces(3, Exact.ROUND_DOWN).toFixed();
 }

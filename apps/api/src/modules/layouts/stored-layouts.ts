@@ -70,6 +70,20 @@ export async function sideLayoutFor(
   return workedOnce(context, input, sha256(layoutInputKey(input)), workOut);
 }
 
+/** Pieces of the layouts on drawn sides that are kept, by the key of what they were asked. */
+export async function piecesBySideInput(
+  em: Work['em'],
+  keys: readonly string[],
+): Promise<Map<string, number>> {
+  const keyOf = new Map(keys.map((key) => [sha256(key), key]));
+  const kept = await em.find(
+    StoredLayout,
+    { inputHash: { $in: [...keyOf.keys()] } },
+    { fields: ['inputHash', 'pieces'] },
+  );
+  return new Map(kept.map(({ inputHash, pieces }) => [keyOf.get(inputHash) ?? '', pieces]));
+}
+
 async function workedOnce<Source, Laid>(
   { orm }: Pick<Context, 'orm'>,
   source: Source,

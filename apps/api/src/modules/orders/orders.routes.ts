@@ -1,14 +1,6 @@
 import { Router } from 'express';
-import {
-  checkQuote,
-  listOrders,
-  readOrder,
-  recordArrival,
-  shipOrder,
-  takeOnOrder,
-} from '@hidewright/contract';
+import { listOrders, readOrder, recordArrival, shipOrder, takeOnOrder } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
-import { checkQuotedRun } from '../../flows/check-run.ts';
 import { noteArrival } from '../../flows/note-arrival.ts';
 import { shipOrder as ship } from '../../flows/ship-order.ts';
 import { takeOnOrder as takeOn } from '../../flows/take-on-order.ts';
@@ -18,10 +10,6 @@ import { findOrders, readOrderReply } from './orders.repository.ts';
 
 export function orderRoutes(context: Context): Router {
   const router = Router();
-
-  serve(router, context, checkQuote, (work, { params, query }) =>
-    checkQuotedRun(work, { quoteId: params.id, quantity: query.quantity, by: query.by }),
-  );
 
   serve(router, context, listOrders, async ({ em }, { query }) => {
     const { limit, q, state, customerId } = query;

@@ -1,0 +1,59 @@
+import type { CheckAnswer } from '@hidewright/contract';
+import { checkRuns, type RunFacts, type ShopStock } from '@hidewright/domain';
+import type { Work } from '../../work.ts';
+import type { Tool } from '../../modules/tools/tool.entity.ts';
+import { freeLotRows } from './leather-for-check.ts';
+import { loadShopStock } from './load-shop-stock.ts';
+import { needsOf, toolsOf, toToolStock } from './needs-of-runs.ts';
+import { pressForCheck } from './press-for-check.ts';
+import type { PlannedRun } from './runs-asked.ts';
+
+export interface CheckedRun {
+  planned: PlannedRun;
+  facts: RunFacts;
+  press: CheckAnswer | null;
+}
+
+export interface CheckedRuns {
+  shop: ShopStock;
+  runs: CheckedRun[];
+}
+
+/** Planned runs against all that the shop has and expects, each given what those before it leave. */
+export async function checkPlanned(
+  work: Work,
+  planned: readonly PlannedRun[],
+): Promise<CheckedRuns> {
+  const { em } = work;
+  const leatherIds = [...new Set(planned.map(({ plan }) => plan.leatherId))];
+  const hardware = planned.flatMap(({ plan }) => plan.hardware);
+  const hardwareIds = [...new Set(hardware.map(({ hardwareId }) => hardwareId))];
+  const rows = await freeLotRows(em, leatherIds);
+  const stock = await loadShopStock(work, { leatherIds, hardwareIds }, rows);
+  const tools = await inTurn(planned, (run) => toolsOf(em, run));
+  const needs = await inTurn(planned, (run, at) =>
+    needsOf(em, run, { rows, tools: tools[at] ?? { needs: [], tools: [] } }),
+  );
+  const shop = { ...stock, tools: once(tools.flatMap((each) => each.tools)).map(toToolStock) };
+  const facts = checkRuns(shop, needs);
+  const runs = await inTurn(planned, async (run, at) => ({
+    planned: run,
+    facts: facts[at] as RunFacts,
+    press: await pressForCheck(em, run, tools[at]?.tools ?? []),
+  }));
+  return { shop, runs };
+}
+
+const once = (tools: readonly Tool[]): Tool[] => [
+  ...new Map(tools.map((tool) => [tool.id, tool])).values(),
+];
+
+/** One after another: they share a connection. */
+async function inTurn<Item, Made>(
+  items: readonly Item[],
+  make: (item: Item, at: number) => Promise<Made>,
+): Promise<Made[]> {
+  const made: Made[] = [];
+  for (const [at, item] of items.entries()) made.push(await make(item, at));
+  return made;
+}

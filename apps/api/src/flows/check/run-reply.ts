@@ -1,0 +1,143 @@
+import type { CheckAnswer, CheckLot, RunCheck } from '@hidewright/contract';
+import {
+  hardwareWords,
+  hoursWords,
+  leatherWords,
+  lotWords,
+  toolWords,
+  type HoursFacts,
+  type ItemFacts,
+  type LeatherFacts,
+  type LotTaken,
+  type Say,
+  type Standing,
+  type ToolFacts,
+} from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import type { EntityManager } from '@mikro-orm/sqlite';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { sayDay } from '../../modules/quotes/say-day.ts';
+import { sayArea } from '../../modules/stock/say-area.ts';
+import { Workshop } from '../../modules/workshop/workshop.entity.ts';
+import type { CheckedRun } from './checked-runs.ts';
+
+/** How this shop says areas and days. */
+export async function sayFor(em: EntityManager): Promise<Say> {
+  const { areaUnit } = await em.findOneOrFail(Workshop, 1);
+  return { area: (areaMm2) => sayArea(new Decimal(areaMm2.toString()), areaUnit), day: sayDay };
+}
+
+/** Every question answered, with what to take or what mends it. */
+export function runReply({ planned, facts, press }: CheckedRun, say: Say): RunCheck {
+  const { plan, by } = planned;
+  const answers = [
+    leatherAnswer(facts.leather, say),
+    ...facts.items.map((item) => itemAnswer(item, say)),
+    ...facts.tools.map(toolAnswer),
+    ...(press === null ? [] : [press]),
+    hoursAnswer(facts.hours, say),
+  ];
+  return {
+    quantity: plan.quantity,
+    by,
+    startBy: facts.startBy,
+    cutCount: plan.cutCount,
+    containers: plan.containers,
+    yes: answers.every(({ enough }) => enough),
+    answers,
+    lots: facts.leather.takes.map(toLot),
+    notes: notesOn(planned),
+    earliestDay: facts.earliest,
+  };
+}
+
+function notesOn({ plan, customerId, definition }: CheckedRun['planned']): string[] {
+  const plate =
+    plan.needsPlate && customerId === null
+      ? ['A stamp plate is cut for each design: allow for its days.']
+      : [];
+  const supplies = (definition.supplies ?? []).map(({ name }) => name);
+  const unseen =
+    supplies.length === 0 ? [] : [`Not counted here, look yourself: ${supplies.join(', ')}.`];
+  return [...plate, ...unseen];
+}
+
+const area = (thousandths: number): string => unscaled(thousandths, 3).toFixed();
+
+const figures = (
+  { needed, now, free, short, enoughOn }: Standing,
+  text: (quantity: number) => string,
+) => ({
+  needed: text(needed),
+  freeNow: text(now),
+  free: text(free),
+  short: text(short),
+  enough: short === 0,
+  enoughOn,
+});
+
+function leatherAnswer(facts: LeatherFacts, say: Say): CheckAnswer {
+  const { name } = facts.leather;
+  return {
+    ...figures(facts.standing, area),
+    about: 'leather',
+    name,
+    unit: 'mm2',
+    enough: facts.piecesShort === 0,
+    sentence: leatherWords(facts, say),
+  };
+}
+
+function itemAnswer(facts: ItemFacts, say: Say): CheckAnswer {
+  const { name, kind } = facts.item;
+  const sentence = hardwareWords(facts, say);
+  return { ...figures(facts, String), about: kind, name, unit: 'piece', sentence };
+}
+
+function toolAnswer(facts: ToolFacts): CheckAnswer {
+  const { need, tool, strikesNeeded, strikesLeft, ok } = facts;
+  const left = tool === null ? 0 : strikesLeft;
+  return {
+    about: 'tooling',
+    name: tool?.name ?? need.word,
+    unit: 'strike',
+    needed: String(strikesNeeded),
+    freeNow: String(left),
+    free: String(left),
+    short: String(Math.max(0, strikesNeeded - left)),
+    enough: ok,
+    enoughOn: null,
+    sentence: toolWords(facts),
+  };
+}
+
+function hoursAnswer(facts: HoursFacts, say: Say): CheckAnswer {
+  const text = (hundredths: number) => unscaled(hundredths, 2).toString();
+  return {
+    about: 'hours',
+    name: 'Bench hours',
+    unit: 'minute',
+    needed: text(facts.needed),
+    freeNow: text(facts.free),
+    free: text(facts.free),
+    short: text(Math.max(0, facts.needed - facts.free)),
+    enough: facts.ok,
+    enoughOn: facts.earliest,
+    sentence: hoursWords(facts, say),
+  };
+}
+
+function toLot(taken: LotTaken): CheckLot {
+  const { lot, pieces, by } = taken;
+  return {
+    lotId: lot.lotId,
+    tag: lot.tag,
+    place: lot.place,
+    shade: lot.shade,
+    freeAreaMm2: lot.freeAreaMm2,
+    takesAreaMm2: area(taken.area),
+    pieces,
+    by,
+    sentence: lotWords(taken),
+  };
+}

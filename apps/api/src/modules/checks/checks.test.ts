@@ -1,0 +1,255 @@
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import type { PurchaseOrder, RunsCheck } from '@hidewright/contract';
+import {
+  agreedQuote,
+  readyForTheBench,
+  takenOn,
+  type BenchShop,
+} from '../../testing/bench-shop.ts';
+import { draftQuote } from '../../testing/example-quote.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let ready: BenchShop;
+
+beforeEach(async () => {
+  ready = await readyForTheBench(await startTestShop());
+});
+afterEach(() => ready.shop.close());
+
+const as = (role: 'owner' | 'maker' | 'bookkeeper') => ready.shop.as(role);
+const post = (runs: object[], role: 'owner' | 'maker' | 'bookkeeper' = 'maker') =>
+  as(role).post('/api/checks').send({ runs });
+const check = async (runs: object[]) => (await post(runs).expect(200)).body as RunsCheck;
+const draft = async (runs: object[]) =>
+  (await as('owner').post('/api/checks/purchase-orders').send({ runs }).expect(201)).body as {
+    orders: PurchaseOrder[];
+    notes: string[];
+  };
+const rivetsOf = ({ runs }: RunsCheck, at: number) =>
+  runs[at]?.answers.find(({ about }) => about === 'hardware');
+
+/** Who sells the rivets and the leather, and how long they take. */
+async function nameSuppliers(): Promise<void> {
+  const sells = async (name: string, leadDays: number) =>
+    (await as('owner').post('/api/suppliers').send({ name, leadDays }).expect(201)).body as {
+      id: number;
+    };
+  const fittings = await sells('Fennbridge Fittings', 3);
+  const tannery = await sells('Oldbeck Tannery', 9);
+  await change(`hardware/${ready.hardwareId}`, { supplierId: fittings.id });
+  await change(`leathers/${ready.leatherId}`, {
+    supplierId: tannery.id,
+    wholeForm: 'side',
+    wholeAreaMm2: '2043866.88',
+  });
+}
+
+async function change(path: string, body: object): Promise<void> {
+  const { version } = (await as('owner').get(`/api/${path}`).expect(200)).body as {
+    version: number;
+  };
+  await as('owner').patch(`/api/${path}`).set('If-Match', `"${version}"`).send(body).expect(200);
+}
+
+async function orderRivets(quantity: number, expectedOn: string): Promise<string> {
+  const { hardwareId } = ready;
+  const supplier = await as('owner')
+    .post('/api/suppliers')
+    .send({ name: 'Kettlewell' })
+    .expect(201);
+  const lines = [{ of: 'hardware', hardwareId, quantity, unitPrice: '0.17' }];
+  const order = await as('owner')
+    .post('/api/purchase-orders')
+    .send({ supplierId: supplier.body.id, expectedOn, lines })
+    .expect(201);
+  await as('owner')
+    .post(`/api/purchase-orders/${order.body.id}/sendings`)
+    .send({ by: 'hand' })
+    .expect(201);
+  return order.body.number as string;
+}
+
+describe('Can we make them?', () => {
+  it('gives the second run what the first leaves, by its day and not by its place', async () => {
+    const { patternId } = ready;
+    const late = { patternId, quantity: 60, by: '2026-12-16' };
+    const early = { patternId, quantity: 100, by: '2026-12-11' };
+    const found = await check([late, early]);
+    expect(found.runs.map(({ turn, name }) => [turn, name])).toEqual([
+      [2, 'Round coaster'],
+      [1, 'Round coaster'],
+    ]);
+    expect([rivetsOf(found, 0)?.free, rivetsOf(found, 1)?.free]).toEqual(['100', '300']);
+    expect([rivetsOf(found, 0)?.short, rivetsOf(found, 1)?.short]).toEqual(['20', '0']);
+    expect(found.yes).toBe(false);
+    expect((await check([late])).runs[0]?.yes).toBe(true);
+    expect(found.runs[0]?.notes).toContain(
+      'A stamp plate is cut for each design: allow for its days.',
+    );
+    expect((await as('owner').get('/api/reservations')).body).toMatchObject({ items: [] });
+  });
+
+  it('counts on what is on order in time, and names the day by which the rest can be mended', async () => {
+    await nameSuppliers();
+    const number = await orderRivets(100, '2026-12-08');
+    const quote = await agreedQuote(ready, 50);
+    const others = { patternId: ready.patternId, quantity: 150, by: '2026-12-03' };
+    const found = await check([{ quoteId: quote.id, by: '2026-12-16' }, others]);
+    expect(rivetsOf(found, 0)).toMatchObject({ freeNow: '0', free: '100', short: '0' });
+    expect(rivetsOf(found, 0)?.sentence).toBe(
+      `Rivet 9 mm: 0 of 100 are free now. The rest comes with ${number} by Tue 8 Dec 2026, in time.`,
+    );
+    const leather = found.short.find(({ of }) => of === 'leather');
+    expect(leather).toMatchObject({ supplierName: 'Oldbeck Tannery', arrivesOn: '2026-12-10' });
+    expect(leather?.runsOutOn).not.toBeNull();
+    expect(Number(leather?.days.at(-1)?.left)).toBeLessThan(0);
+    const [, second] = found.runs;
+    expect(second?.answers[0]?.sentence).toMatch(
+      /short\. Buy 1 more side, or receive it if it is here\. Ordered from Oldbeck Tannery today, it is here by Thu 10 Dec 2026\.$/,
+    );
+    expect(second?.earliestDay).toBe('2026-12-10');
+    expect(JSON.stringify(found)).not.toMatch(/price|cost|total|9\.5|0\.17/i);
+  });
+
+  it('keeps what a job taken on still needs, and holds no more than is free of that', async () => {
+    await nameSuppliers();
+    const big = await agreedQuote(ready, 250);
+    const order = { quoteId: big.id, promisedOn: '2026-12-16', evenIfShort: true };
+    await as('owner').post('/api/orders').send(order).expect(201);
+    const receipt = { hardware: [{ hardwareId: ready.hardwareId, quantity: 250, cost: '42.00' }] };
+    await as('owner').post('/api/receipts').send(receipt).expect(201);
+    const found = await check([{ patternId: ready.patternId, quantity: 50, by: '2026-12-18' }]);
+    // 250 came, 200 of them are owed to the job that holds only 300 of 500.
+    expect(rivetsOf(found, 0)).toMatchObject({ needed: '100', freeNow: '50', short: '50' });
+    const rivets = found.short.find(({ of }) => of === 'hardware');
+    expect(rivets).toMatchObject({ onHand: '550', reserved: '300', needed: '100', buy: '50' });
+    expect(rivets?.days.map(({ what, goes }) => [what[0], goes])).toContainEqual([
+      'J-0001 Coasters with a bramble',
+      '200',
+    ]);
+  });
+
+  it('takes a layout on the lot as drawn at its word, flaws and all', async () => {
+    const side = [
+      { x: 0, y: 0 },
+      { x: 1200, y: 0 },
+      { x: 1200, y: 900 },
+      { x: 0, y: 900 },
+    ];
+    const flaw = [
+      { x: 100, y: 100 },
+      { x: 1100, y: 100 },
+      { x: 1100, y: 700 },
+      { x: 100, y: 700 },
+    ];
+    const drawing = { outline: side, flaws: [flaw], usablePercent: '85' };
+    const { version } = (await as('owner').get(`/api/lots/${ready.lotId}`).expect(200)).body as {
+      version: number;
+    };
+    await as('maker')
+      .put(`/api/lots/${ready.lotId}/drawing`)
+      .set('If-Match', `"${version}"`)
+      .send(drawing)
+      .expect(200);
+    const run = { patternId: ready.patternId, quantity: 20, by: '2026-12-16' };
+    const [unlaid] = (await check([run])).runs;
+    // 480,000 of 1,080,000 mm² are sound: five panels, though 85 % would be ten.
+    expect(unlaid?.lots[0]?.sentence).toMatch(/by its usable share/);
+    expect((await check([{ ...run, quantity: 60 }])).runs[0]?.answers[0]).toMatchObject({
+      free: String(5 * 92257.88),
+    });
+    const laid = await as('maker')
+      .post(`/api/lots/${ready.lotId}/layouts`)
+      .send({ patternId: ready.patternId });
+    expect(laid.status, JSON.stringify(laid.body)).toBeLessThan(300);
+    const [byLayout] = (await check([run])).runs;
+    expect(byLayout?.lots[0]).toMatchObject({ by: 'layout' });
+    const { cutCount = 0 } = byLayout ?? {};
+    expect(byLayout?.lots[0]?.sentence).toBe(
+      `${cutCount} pieces by its layout; room for ${laid.body.pieces - cutCount} more stays`,
+    );
+  });
+});
+
+describe('drafting what is short', () => {
+  it('drafts one order for each supplier in full packs, and nothing twice', async () => {
+    await nameSuppliers();
+    const runs = [
+      { patternId: ready.patternId, quantity: 200, by: '2026-12-21' },
+      { quoteId: (await draftQuote(ready)).id, quantity: 100, by: '2026-12-18' },
+    ];
+    const first = await draft(runs);
+    expect(first.orders.map(({ supplierName, lines }) => [supplierName, lines.length])).toEqual(
+      expect.arrayContaining([
+        ['Fennbridge Fittings', 1],
+        ['Oldbeck Tannery', 1],
+      ]),
+    );
+    const rivets = first.orders.find(({ supplierName }) => supplierName === 'Fennbridge Fittings');
+    expect(rivets).toMatchObject({
+      state: 'draft',
+      expectedOn: '2026-12-04',
+      note: 'For Round coaster, packed by Mon 21 Dec 2026.',
+      lines: [{ quantity: 300 }],
+    });
+    const again = await draft(runs);
+    expect(again.orders).toEqual([]);
+    expect(again.notes).toContain(`Rivet 9 mm is on draft ${rivets?.number} already: send it.`);
+    expect(rivetsOf(await check(runs), 0)?.sentence).toContain(
+      `${rivets?.number} is drafted for it: send it.`,
+    );
+  });
+
+  it('names what nobody is known to sell, and is for the owner', async () => {
+    const runs = [{ patternId: ready.patternId, quantity: 200 }];
+    const { orders, notes } = await draft(runs);
+    expect(orders).toEqual([]);
+    expect(notes).toContain('Rivet 9 mm has no supplier. Say who sells it, then draft again.');
+    await as('maker').post('/api/checks/purchase-orders').send({ runs }).expect(403);
+    await post(runs, 'bookkeeper').expect(403);
+  });
+});
+
+describe('what makes no sense', () => {
+  it('is refused beside its field', async () => {
+    const { patternId } = ready;
+    const quote = await agreedQuote(ready);
+    const refused = async (runs: object[]) => {
+      const reply = await post(runs).expect(422);
+      return (reply.body.errors as { field: string; message: string }[]).map(
+        ({ field, message }) => `${field}: ${message}`,
+      );
+    };
+    expect(await refused([{ patternId: 999, quantity: 5 }])).toEqual([
+      'runs.0.patternId: This pattern is not there. Choose one from the list.',
+    ]);
+    expect(await refused([{ patternId, quantity: 0 }])).toEqual([
+      'runs.0.quantity: Enter 1 or more pieces.',
+    ]);
+    expect(await refused([{ patternId }])).toEqual(['runs.0.quantity: Enter how many.']);
+    expect(await refused([{ patternId, quantity: 5, by: '2026-11-30' }])).toEqual([
+      'runs.0.by: That day is over. Choose today or a day to come.',
+    ]);
+    expect(await refused([{ quoteId: quote.id }, { quoteId: quote.id }])).toEqual([
+      'runs.1.quoteId: This quote is chosen already. Check it once, with all of its quantity.',
+    ]);
+    expect(await refused([{ quoteId: 999 }])).toEqual([
+      'runs.0.quoteId: This quote is not there. Choose one from the list.',
+    ]);
+    expect(await refused([{ quoteId: quote.id, option: 'In gold' }])).toEqual([
+      `runs.0.option: ${quote.number} offers no option "In gold". Choose one that it offers.`,
+    ]);
+    expect(await refused([{ patternId, quantity: 5, option: 'In gold' }])).toHaveLength(1);
+    expect(await refused([{}])).toHaveLength(1);
+    expect(await refused([{ patternId, quoteId: quote.id, quantity: 5 }])).toHaveLength(1);
+    await post([]).expect(422);
+  });
+
+  it('is refused for a quote that is taken on already', async () => {
+    const order = await takenOn(ready);
+    const reply = await post([{ quoteId: order.quoteId }]).expect(422);
+    expect(reply.body.errors[0].message).toBe(
+      `${order.quoteNumber} is taken on as ${order.number}: what it needs is held already.`,
+    );
+  });
+});

@@ -1,0 +1,88 @@
+import type { Day } from '../promise/day.ts';
+import type { Buying, ItemStock } from './check-stock.ts';
+import {
+  type Dated,
+  type Drawn,
+  drawFor,
+  enoughFrom,
+  freeBy,
+  type PromisePool,
+} from './promise-pool.ts';
+
+/** How one need stands; quantities in pieces, or in thousandths of mm². */
+export interface Standing {
+  needed: number;
+  /** of what is needed, free now */
+  now: number;
+  /** free by the day on which it is needed */
+  free: number;
+  short: number;
+  /** the first day on which all of it can be there; null where nobody can tell */
+  enoughOn: Day | null;
+  /** what must be bought for that day, beside what is on order */
+  buy: number;
+  /** of that, what a draft holds already */
+  drafted: number;
+  /** what comes from suppliers and is counted on */
+  coming: Dated[];
+}
+
+export interface ItemFacts extends Standing {
+  item: ItemStock;
+}
+
+interface Asked {
+  pool: PromisePool;
+  buying: Buying;
+  needed: number;
+  /** when it is needed */
+  day: Day;
+  today: Day;
+}
+
+/**
+ * Draws what is needed by a day. Where that is too little, waiting for what is on order is weighed against buying
+ * more: whichever is here sooner, and nothing is bought that comes in time anyhow.
+ */
+export function drawOrMend(asked: Asked): { standing: Standing; left: PromisePool } {
+  const { pool, buying, needed, day, today } = asked;
+  const comesOn = enoughFrom(pool, needed, today);
+  const waits = comesOn !== null && (buying.arrivesOn === null || comesOn <= buying.arrivesOn);
+  const drawn = drawFor(pool, day, needed, waits ? null : buying.arrivesOn);
+  const inTime = drawn.inTime === needed;
+  const standing = {
+    needed,
+    now: drawn.now,
+    free: freeBy(pool, day),
+    short: needed - drawn.inTime,
+    enoughOn: inTime || waits ? comesOn : buying.arrivesOn,
+    buy: drawn.lacking,
+    drafted: Math.min(drawn.lacking, buying.drafted),
+    coming: comingWith(pool, drawn, day),
+  };
+  return { standing, left: drawn.left };
+}
+
+/** The papers that bring what is drawn beyond what is free now. */
+function comingWith({ receipts }: PromisePool, { now, inTime, later }: Drawn, day: Day): Dated[] {
+  const until = later.at(-1)?.day ?? day;
+  return inTime === now && later.length === 0 ? [] : receipts.filter((each) => each.day <= until);
+}
+
+export function drawItem(
+  item: ItemStock,
+  quantity: number,
+  { day, today }: Pick<Asked, 'day' | 'today'>,
+): { facts: ItemFacts; left: ItemStock } {
+  const { pool, buying } = item;
+  const { standing, left } = drawOrMend({ pool, buying, needed: quantity, day, today });
+  return {
+    facts: { ...standing, item },
+    left: { ...item, pool: left, buying: lessDrafted(buying, standing.drafted) },
+  };
+}
+
+export const lessDrafted = (buying: Buying, used: number): Buying => ({
+  ...buying,
+  drafted: buying.drafted - used,
+});

@@ -1,0 +1,153 @@
+import type { Day } from '../promise/day.ts';
+import { Exact } from '../numbers/decimal-text.ts';
+import { drawOrMend, lessDrafted, type Standing } from './check-items.ts';
+import type { LeatherNeed, LeatherStock, RackLot } from './check-stock.ts';
+import { chooseLots, type LotOffer, shadesOf } from './choose-lots.ts';
+import {
+  areaForPieces,
+  type LotToCut,
+  type PiecesOfLot,
+  piecesFromLot,
+  usableAreaMm2,
+} from './pieces-from-lot.ts';
+
+export interface LotTaken {
+  lot: RackLot;
+  pieces: number;
+  by: PiecesOfLot['by'];
+  /** panels or strips to take, or pieces where it is cut as it lies */
+  units: number;
+  /** thousandths of mm² */
+  area: number;
+  /** how many more units stay on it */
+  unitsLeft: number;
+}
+
+export interface LeatherFacts {
+  leather: LeatherStock;
+  takes: LotTaken[];
+  /** more than one where they would mix */
+  shades: string[];
+  likeShade: string | null;
+  piecesNeeded: number;
+  /** to be cut from what comes in time, and from nothing at all yet */
+  piecesComing: number;
+  piecesShort: number;
+  /** areas in thousandths of mm² */
+  standing: Standing;
+}
+
+interface Offered {
+  lot: RackLot;
+  cut: LotToCut;
+  from: PiecesOfLot;
+}
+
+const thousandths = 1000;
+
+/** Draws a run's pieces from the lots, and what they do not give from leather that is yet to come. */
+export function drawLeather(
+  leather: LeatherStock,
+  need: LeatherNeed,
+  when: { pieces: number; day: Day; today: Day },
+): { facts: LeatherFacts; left: LeatherStock } {
+  const offered = leather.lots.map((lot): Offered => {
+    const cut = { ...lot, laid: need.laid.get(lot.lotId) ?? null };
+    return { lot, cut, from: piecesFromLot(cut, need.cut) };
+  });
+  const offers = offered.map(({ lot, from }): LotOffer => ({ ...lot, pieces: from.pieces }));
+  const fromLots = Math.min(when.pieces, notOwed(leather, need));
+  const chosen = chooseLots(offers, fromLots, need.likeShade);
+  const takes = chosen.flatMap(({ lotId, pieces }) => {
+    const each = offered.find(({ lot }) => lot.lotId === lotId);
+    return each === undefined ? [] : [takeFrom(each, pieces)];
+  });
+  const cut = takes.reduce((sum, { pieces }) => sum + pieces, 0);
+  const rest = drawRest(leather, need, { ...when, pieces: when.pieces - cut });
+  const facts = {
+    leather,
+    takes,
+    shades: shadesOf(offers, chosen),
+    likeShade: need.likeShade,
+    piecesNeeded: when.pieces,
+    piecesComing: rest.inTime,
+    piecesShort: when.pieces - cut - rest.inTime,
+    standing: withLots(rest.standing, takes, areaOfOffers(offered)),
+  };
+  return { facts, left: leftOf(leather, takes, rest) };
+}
+
+/** Pieces that may be cut now without taking what jobs taken on before still need. */
+function notOwed({ lots, owed }: LeatherStock, { cut }: LeatherNeed): number {
+  if (owed === 0) return Infinity;
+  const usable = lots.reduce(
+    (sum, lot) => sum.plus(usableAreaMm2({ ...lot, laid: null })),
+    new Exact(0),
+  );
+  const panels = usable.minus(new Exact(owed).div(thousandths)).div(cut.areaMm2).floor();
+  return Math.max(0, panels.toNumber()) * cut.pieces;
+}
+
+function takeFrom({ lot, cut, from }: Offered, pieces: number): LotTaken {
+  const units = Math.ceil(pieces / from.perUnit);
+  return {
+    lot,
+    pieces,
+    by: from.by,
+    units,
+    area: areaForPieces(cut, from, pieces).times(thousandths).toNumber(),
+    unitsLeft: Math.floor(from.pieces / from.perUnit) - units,
+  };
+}
+
+interface Rest {
+  standing: Standing;
+  left: LeatherStock['pool'];
+  /** pieces from what comes in time */
+  inTime: number;
+}
+
+/** Leather that is yet to come is drawn by whole panels. */
+function drawRest(
+  { pool, buying }: LeatherStock,
+  { cut }: LeatherNeed,
+  { pieces, day, today }: { pieces: number; day: Day; today: Day },
+): Rest {
+  const panel = new Exact(cut.areaMm2).times(thousandths).ceil().toNumber();
+  const needed = Math.ceil(pieces / cut.pieces) * panel;
+  const { standing, left } = drawOrMend({ pool, buying, needed, day, today });
+  const panelsInTime = Math.floor((needed - standing.short) / panel);
+  return { standing, left, inTime: Math.min(pieces, panelsInTime * cut.pieces) };
+}
+
+const areaOfOffers = (offered: readonly Offered[]): number =>
+  offered.reduce(
+    (sum, { cut, from }) =>
+      sum + areaForPieces(cut, from, from.pieces).times(thousandths).toNumber(),
+    0,
+  );
+
+function withLots(rest: Standing, takes: readonly LotTaken[], onRack: number): Standing {
+  const taken = takes.reduce((sum, { area }) => sum + area, 0);
+  return {
+    ...rest,
+    needed: taken + rest.needed,
+    now: taken,
+    free: rest.short > 0 ? taken + rest.needed - rest.short : onRack + rest.free,
+  };
+}
+
+function leftOf(leather: LeatherStock, takes: readonly LotTaken[], rest: Rest): LeatherStock {
+  const lots = leather.lots.map((lot) => {
+    const taken = takes.find((take) => take.lot.lotId === lot.lotId);
+    if (taken === undefined) return lot;
+    const free = new Exact(lot.freeAreaMm2).minus(new Exact(taken.area).div(thousandths));
+    return { ...lot, freeAreaMm2: free.toFixed() };
+  });
+  return {
+    ...leather,
+    lots,
+    pool: rest.left,
+    buying: lessDrafted(leather.buying, rest.standing.drafted),
+  };
+}

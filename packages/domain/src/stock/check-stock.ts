@@ -1,0 +1,103 @@
+import type { DecimalText } from '../numbers/decimal-text.ts';
+import type { Bench, WorkPart } from '../promise/bench-time.ts';
+import type { Day } from '../promise/day.ts';
+import type { HeldWork } from '../promise/held-work.ts';
+import type { CutFrom, LotToCut } from './pieces-from-lot.ts';
+import type { PromisePool } from './promise-pool.ts';
+
+/** Where more of an item comes from. */
+export interface Buying {
+  /** null where nobody is named who sells it */
+  supplier: string | null;
+  /** when it is here if it is ordered today; null where nobody is named */
+  arrivesOn: Day | null;
+  /** drafted for it and not sent yet: pieces, or thousandths of mm² */
+  drafted: number;
+  /** the numbers of those drafts */
+  drafts: readonly string[];
+  /** orders that should have brought some by now, and are not counted on */
+  overdue?: readonly string[];
+}
+
+/** Hardware or supplies, in pieces. */
+export interface ItemStock {
+  hardwareId: number;
+  name: string;
+  kind: 'hardware' | 'supplies';
+  packSize: number;
+  pool: PromisePool;
+  buying: Buying;
+}
+
+export interface RackLot extends Omit<LotToCut, 'laid'> {
+  lotId: number;
+  tag: string;
+  place: string;
+  shade: string;
+  receivedOn: Day;
+}
+
+/** A leather: its lots, and what of it is yet to come in thousandths of mm² that can be cut. */
+export interface LeatherStock {
+  leatherId: number;
+  name: string;
+  lots: readonly RackLot[];
+  /** what jobs taken on still need and do not hold, in thousandths of mm² */
+  owed: number;
+  /** what comes; nothing is free in it, for that lies in the lots */
+  pool: PromisePool;
+  /** what it is bought as, whole; null where nobody said */
+  whole: { form: string; areaMm2: DecimalText } | null;
+  /** the share of what is bought that can be cut */
+  usablePercent: DecimalText;
+  buying: Buying;
+}
+
+export interface ToolStock {
+  toolId: number;
+  name: string;
+  strikesLeft: number;
+  piecesPerStrike: number;
+}
+
+/** All that runs may be given, as it stands before any of them. */
+export interface ShopStock {
+  today: Day;
+  bench: Bench;
+  held: readonly HeldWork[];
+  leathers: readonly LeatherStock[];
+  items: readonly ItemStock[];
+  tools: readonly ToolStock[];
+}
+
+export interface LeatherNeed {
+  leatherId: number;
+  cut: CutFrom;
+  /** pieces by a layout on the whole lot as drawn, where there is one */
+  laid: ReadonlyMap<number, number>;
+  /** the shade of the lot that an earlier run was cut from; null where it is no reorder */
+  likeShade: string | null;
+}
+
+export interface ToolNeed {
+  /** Cutting die, Stamp plate */
+  word: string;
+  /** those on the rack that serve, the fittest first */
+  choices: readonly number[];
+  /** what to do where none is here */
+  otherwise: string;
+}
+
+/** What one run asks for. */
+export interface RunNeeds {
+  /** the day by which it must be packed */
+  by: Day;
+  /** pieces to cut */
+  pieces: number;
+  leather: LeatherNeed;
+  hardware: readonly { hardwareId: number; quantity: number }[];
+  tools: readonly ToolNeed[];
+  /** bench time in hundredths of a minute, and the same with the waits between steps */
+  minutes: number;
+  parts: readonly WorkPart[];
+}

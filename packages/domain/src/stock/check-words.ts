@@ -1,0 +1,149 @@
+import type { Decimal } from 'decimal.js';
+import { Exact, toAtMost } from '../numbers/decimal-text.ts';
+import { countWords } from '../numbers/count-words.ts';
+import type { Day } from '../promise/day.ts';
+import type { ItemFacts, Standing } from './check-items.ts';
+import type { LeatherFacts, LotTaken } from './check-leather.ts';
+import type { HoursFacts } from './check-runs.ts';
+import type { Buying } from './check-stock.ts';
+import type { ToolFacts } from './check-tools.ts';
+import { leatherToBuy } from './what-to-buy.ts';
+
+/** How the shop says areas and days. */
+export interface Say {
+  area: (areaMm2: Decimal) => string;
+  day: (day: Day) => string;
+}
+
+const mm2 = (thousandths: number): Decimal => new Exact(thousandths).div(1000);
+
+/** What to take, or what is short and what mends it; a sentence or more, for the maker: never a price. */
+export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): string {
+  const { needed, now, free, short } = standing;
+  const pieces = (count: number) => countWords(count);
+  if (short === 0) {
+    if (now === needed) return `${item.name}: take ${pieces(needed)} of ${pieces(free)} free.`;
+    return `${item.name}: ${pieces(now)} of ${pieces(needed)} are free now. The rest ${comes(standing, say)}, in time.`;
+  }
+  const head = `${item.name}: ${pieces(needed)} needed, ${pieces(free)} free, ${pieces(short)} short.`;
+  const missing = standing.buy - standing.drafted;
+  const buy =
+    item.packSize <= 1
+      ? `Buy ${pieces(missing)}, or receive them if they are here.`
+      : `Buy ${packs(Math.ceil(missing / item.packSize), item.packSize)}, or receive them if they are here.`;
+  return [head, ...remedy(standing, item.buying, missing > 0 ? buy : null, say)].join(' ');
+}
+
+const packs = (count: number, size: number): string =>
+  `${countWords(count)} ${count === 1 ? 'pack' : 'packs'} of ${countWords(size)}`;
+
+/** @see hardwareWords */
+export function leatherWords(facts: LeatherFacts, say: Say): string {
+  const { leather, takes, standing, piecesShort } = facts;
+  const area = (thousandths: number) => say.area(mm2(thousandths));
+  const shades = shadeWords(facts);
+  const from = takes.map((take) => `${area(take.area)} from ${take.lot.tag}`).join(', ');
+  if (piecesShort === 0) {
+    const rest =
+      facts.piecesComing === 0
+        ? []
+        : [`${from === '' ? 'It' : 'The rest'} ${comes(standing, say)}, in time.`];
+    const take = from === '' ? [] : [`take ${from}.`];
+    return `${leather.name}: ${[...take, ...rest, ...shades].join(' ')}`;
+  }
+  const { needed, free, short } = standing;
+  const head = `${leather.name}: ${area(needed)} needed, ${area(free)} free, ${area(short)} short.`;
+  const buying = leatherToBuy(leather, standing.buy - standing.drafted);
+  const amount =
+    buying.whole === null
+      ? `about ${say.area(new Exact(buying.areaMm2))} more`
+      : `${buying.whole.count} more ${wholes(buying.whole)}`;
+  const buy =
+    standing.buy > standing.drafted ? `Buy ${amount}, or receive it if it is here.` : null;
+  return [head, ...remedy(standing, leather.buying, buy, say), ...shades].join(' ');
+}
+
+/** "side", "hides", "bellies". */
+export function wholes({ count, form }: { count: number; form: string }): string {
+  if (count === 1) return form;
+  return form.endsWith('y') ? `${form.slice(0, -1)}ies` : `${form}s`;
+}
+
+function shadeWords({ shades, likeShade, takes }: LeatherFacts): string[] {
+  const noted = shades.filter(Boolean);
+  if (noted.length > 1)
+    return [`Shades would mix: ${noted.join(' and ')}. Show the customer both, or wait for one.`];
+  if (takes.length > 1 && shades.includes('')) {
+    return [
+      `Lay ${takes.map(({ lot }) => lot.tag).join(' and ')} side by side first: not every shade is noted.`,
+    ];
+  }
+  const [shade] = noted;
+  return likeShade && shade !== likeShade && takes.length > 0
+    ? [`The earlier run was cut from ${likeShade}${shade ? `, this would be ${shade}` : ''}.`]
+    : [];
+}
+
+/** "comes with P-0007 by Tue 8 Dec 2026" */
+function comes({ coming, enoughOn }: Standing, say: Say): string {
+  const papers = [...new Set(coming.flatMap(({ paper }) => paper ?? []))];
+  const withPaper = papers.length === 0 ? '' : ` with ${papers.join(' and ')}`;
+  return `comes${withPaper}${enoughOn === null ? '' : ` by ${say.day(enoughOn)}`}`;
+}
+
+function remedy(standing: Standing, buying: Buying, buy: string | null, say: Say): string[] {
+  const { enoughOn } = standing;
+  const late = lateWords(buying);
+  if (standing.buy === 0) return [`The rest ${comes(standing, say)}.`, ...late];
+  const drafted =
+    standing.drafted > 0
+      ? [
+          `${buying.drafts.join(' and ')} is drafted for ${buy === null ? 'it' : 'a part of it'}: send it.`,
+        ]
+      : [];
+  const when =
+    buying.supplier === null || enoughOn === null
+      ? ['Say who sells it, and the day can be told.']
+      : [`Ordered from ${buying.supplier} today, it is here by ${say.day(enoughOn)}.`];
+  return [...drafted, ...(buy === null ? [] : [buy]), ...when, ...late];
+}
+
+const lateWords = ({ overdue = [] }: Buying): string[] =>
+  overdue.length === 0
+    ? []
+    : [`${overdue.join(' and ')} should have brought some by now: ask when it comes.`];
+
+/** What a lot is gone to for: "6 panels for 54 pieces by its usable share; 4 stay". */
+export function lotWords({ by, units, pieces, unitsLeft }: LotTaken): string {
+  if (by === 'layout') {
+    return `${countWords(pieces)} pieces by its layout; room for ${countWords(unitsLeft)} more stays`;
+  }
+  const how = by === 'area' ? ', by its usable share' : '';
+  const panels = `${countWords(units)} ${units === 1 ? 'panel' : 'panels'}`;
+  return `${panels} for ${countWords(pieces)} pieces${how}; ${unitsLeft === 0 ? 'none' : countWords(unitsLeft)} more ${unitsLeft === 1 ? 'stays' : 'stay'}`;
+}
+
+export function toolWords({ need, tool, ok, strikesNeeded, strikesLeft }: ToolFacts): string {
+  if (tool === null) return `${need.word}: not in the shop yet. ${need.otherwise}`;
+  if (ok) return `${tool.name}: ready, ${countWords(strikesLeft)} strikes left in it.`;
+  return `${tool.name}: ${countWords(strikesNeeded)} strikes needed, ${countWords(strikesLeft)} left in it: order a new one.`;
+}
+
+export function hoursWords(facts: HoursFacts, say: Say): string {
+  const { by, needed, free, ok, waits } = facts;
+  const day = say.day(by);
+  const laid = waits ? ', the waits between steps kept' : '';
+  if (ok) return `Bench hours: ${hours(needed)} of the ${hours(free)} free by ${day}${laid}.`;
+  if (needed > free) {
+    return `Bench hours: ${hours(needed)} needed by ${day}, ${hours(free)} free, ${hours(needed - free)} short. ${sooner(facts, say)}`;
+  }
+  return `Bench hours: ${hours(needed)} of the ${hours(free)} free by ${day}, but its pieces must lie between steps. ${sooner(facts, say)}`;
+}
+
+function sooner({ earliest }: HoursFacts, say: Say): string {
+  return earliest === null
+    ? 'The bench has no such hours within a year: set its hours per day in the Office.'
+    : `Promise ${say.day(earliest)} or later, or move another job.`;
+}
+
+const hours = (hundredths: number): string => toAtMost(new Exact(hundredths).div(6000), 1);
