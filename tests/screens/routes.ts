@@ -30,6 +30,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'machine-pays', path: '/pattern-room/presses/pays' },
     { name: 'bench', path: '/bench' },
     { name: 'week-mix', path: '/bench/week-mix' },
+    { name: 'checks', path: '/bench/checks' },
     { name: 'leather', path: '/stockroom/leather' },
     { name: 'lots', path: '/stockroom/lots' },
     { name: 'hardware', path: '/stockroom/hardware' },
@@ -49,6 +50,7 @@ const byRole: Record<Role, Screen[]> = {
   ],
   maker: [
     { name: 'bench', path: '/bench' },
+    { name: 'checks', path: '/bench/checks' },
     { name: 'patterns', path: '/pattern-room/patterns' },
     { name: 'tooling', path: '/pattern-room/tooling' },
     { name: 'leather', path: '/stockroom/leather' },

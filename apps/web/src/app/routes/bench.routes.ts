@@ -15,6 +15,11 @@ export const benchRoutes: RouteObject[] = [
       },
       { path: 'jobs/:id', handle: { crumb: numberOf }, lazy: () => import('./bench/job.tsx') },
       {
+        path: 'checks',
+        handle: { crumb: 'Can we make them?' },
+        lazy: () => import('./bench/checks.tsx'),
+      },
+      {
         path: 'checks/:id',
         handle: { crumb: 'Can we make it?' },
         lazy: () => import('./bench/check.tsx'),

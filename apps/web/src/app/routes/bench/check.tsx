@@ -3,7 +3,7 @@ import { useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
-import { CanWeMakeIt } from '../../../features/orders/components/can-we-make-it.tsx';
+import { CanWeMakeIt } from '../../../features/checks/components/can-we-make-it.tsx';
 import { quoteQuery } from '../../../features/quotes/quotes.queries.ts';
 import { countText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';

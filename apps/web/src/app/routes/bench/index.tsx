@@ -41,7 +41,12 @@ export function Component() {
       <PageHeader
         title="Bench"
         subtitle="What to make next, and what it takes"
-        action={isOwner && <LinkButton to="/bench/week-mix">A week’s mix</LinkButton>}
+        action={
+          <div className="flex flex-wrap gap-2">
+            <LinkButton to="/bench/checks">Can we make it?</LinkButton>
+            {isOwner && <LinkButton to="/bench/week-mix">A week’s mix</LinkButton>}
+          </div>
+        }
       />
       <div className="grid items-start gap-6 xl:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
         <div>

@@ -3,7 +3,7 @@ import { useNavigate } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { say } from '../../../components/toast.ts';
-import { CanWeMakeIt } from '../../../features/orders/components/can-we-make-it.tsx';
+import { CanWeMakeIt } from '../../../features/checks/components/can-we-make-it.tsx';
 import { TakeOnForm } from '../../../features/orders/components/take-on-form.tsx';
 
 interface AcceptRunProps {
@@ -38,6 +38,7 @@ export function AcceptRun({ quote, quantity, option, className }: AcceptRunProps
         quantity={quantity}
         option={option ?? undefined}
         by={inHandsOn ?? undefined}
+        mayOrder
       >
         {(check) =>
           state === 'agreed' && (

@@ -6,7 +6,7 @@ import { PageTitle } from '../../../components/page-title.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { CanWeMakeIt } from '../../../features/orders/components/can-we-make-it.tsx';
+import { CanWeMakeIt } from '../../../features/checks/components/can-we-make-it.tsx';
 import { CustomerAnswer } from '../../../features/quotes/components/customer-answer.tsx';
 import { LayoutCard } from '../../../features/quotes/components/layout-card.tsx';
 import { OnePieceCard } from '../../../features/quotes/components/one-piece-card.tsx';

@@ -7,8 +7,10 @@ import { Notice } from '../../../components/notice.tsx';
 import { ApiProblem } from '../../../lib/api-problem.ts';
 import { countText, dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { checkQuery } from '../orders.queries.ts';
+import { checkQuery } from '../checks.queries.ts';
+import { mendedWords, shortWords } from '../verdict-words.ts';
 import { CheckAnswers } from './check-answers.tsx';
+import { DraftOrders } from './draft-orders.tsx';
 
 interface CanWeMakeItProps {
   quoteId: number;
@@ -16,12 +18,15 @@ interface CanWeMakeItProps {
   quantity?: number;
   option?: string | undefined;
   by?: string | undefined;
+  /** Whether this person may draft purchase orders. */
+  mayOrder?: boolean | undefined;
   /** What follows from the answer, such as taking the order on. */
   children?: (check: RunCheck) => ReactNode;
 }
 
 /** Can we make it? Yes, or exactly what is short: leather, hardware, tooling, bench hours, by that day. */
-export function CanWeMakeIt({ quoteId, quantity, option, by, children }: CanWeMakeItProps) {
+export function CanWeMakeIt(props: CanWeMakeItProps) {
+  const { quoteId, quantity, option, by, mayOrder, children } = props;
   const { today } = useWorkshop();
   const id = useId();
   const [chosen, setChosen] = useState(by !== undefined && by >= today ? by : undefined);
@@ -29,6 +34,7 @@ export function CanWeMakeIt({ quoteId, quantity, option, by, children }: CanWeMa
     data: check,
     error,
     isFetching,
+    refetch,
   } = useQuery(checkQuery(quoteId, { quantity, option, by: chosen }));
   return (
     <Card title="Can we make it?">
@@ -64,6 +70,14 @@ export function CanWeMakeIt({ quoteId, quantity, option, by, children }: CanWeMa
         <div aria-busy={isFetching}>
           <Verdict check={check} />
           <CheckAnswers check={check} />
+          {mayOrder && lacksStock(check) && (
+            <div className="mb-4">
+              <DraftOrders
+                runs={[{ quoteId, quantity: check.quantity, option, by: check.by }]}
+                onDrafted={refetch}
+              />
+            </div>
+          )}
           {children?.(check)}
         </div>
       )}
@@ -71,12 +85,12 @@ export function CanWeMakeIt({ quoteId, quantity, option, by, children }: CanWeMa
   );
 }
 
-const words = {
-  leather: 'leather',
-  hardware: 'hardware',
-  tooling: 'tooling',
-  hours: 'bench hours',
-};
+/** What can be bought: leather, hardware or supplies. */
+const lacksStock = ({ answers }: RunCheck): boolean =>
+  answers.some(
+    ({ about, enough }) =>
+      !enough && (about === 'leather' || about === 'hardware' || about === 'supplies'),
+  );
 
 function Verdict({ check }: { check: RunCheck }) {
   const { today } = useWorkshop();
@@ -88,15 +102,9 @@ function Verdict({ check }: { check: RunCheck }) {
       </Notice>
     );
   }
-  const short = [
-    ...new Set(check.answers.filter(({ enough }) => !enough).map(({ about }) => words[about])),
-  ];
   return (
     <Notice tone="danger" live title={`Not by ${by}:`}>
-      {short.join(' and ')} {short.length === 1 && short[0] !== 'bench hours' ? 'is' : 'are'} short.
-      {check.earliestDay !== null &&
-        check.earliestDay > check.by &&
-        ` The bench has the hours by ${dayText(check.earliestDay, today)}.`}
+      {`${shortWords(check.answers)} ${mendedWords(check, today)}`}
     </Notice>
   );
 }

@@ -1,0 +1,59 @@
+import type { CheckAnswer, RunCheck } from '@hidewright/contract';
+import { StateMark } from '../../../components/state-mark.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+
+/** Each answer in a sentence, and the lots to go to; where something is short, with the way to put it right. */
+export function CheckAnswers({ check }: { check: Pick<RunCheck, 'answers' | 'lots' | 'notes'> }) {
+  return (
+    <>
+      <ul className="my-4 divide-y divide-stitch/60" aria-label="Answers">
+        {check.answers.map((answer) => (
+          <li key={`${answer.about} ${answer.name}`} className="py-2.5">
+            <div className="flex flex-wrap items-baseline gap-x-3 gap-y-1">
+              <StateMark state={answer.enough ? 'received' : 'short'}>
+                {answer.enough ? 'enough' : 'short'}
+              </StateMark>
+              <span className="min-w-0 grow basis-64">{answer.sentence}</span>
+              {!answer.enough && <Remedy about={answer.about} />}
+            </div>
+            {answer.about === 'leather' && <Lots lots={check.lots} />}
+          </li>
+        ))}
+      </ul>
+      {check.notes.map((note) => (
+        <p key={note} className="mb-2 text-ink-soft">
+          {note}
+        </p>
+      ))}
+    </>
+  );
+}
+
+function Lots({ lots }: Pick<RunCheck, 'lots'>) {
+  if (lots.length === 0) return null;
+  return (
+    <ul className="mt-2 space-y-1 pl-4 text-ink-soft" aria-label="From these lots">
+      {lots.map(({ lotId, tag, place, shade, sentence }) => (
+        <li key={lotId}>
+          <TextLink to={`/stockroom/lots/${lotId}`}>{tag}</TextLink>
+          {[place, shade].filter(Boolean).map((word) => `, ${word}`)}
+          {`: ${sentence}`}
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+const remedies: Record<CheckAnswer['about'], { to: string; word: string } | null> = {
+  leather: { to: '/stockroom', word: 'Stockroom' },
+  hardware: { to: '/stockroom/hardware', word: 'Stockroom' },
+  supplies: { to: '/stockroom/hardware', word: 'Stockroom' },
+  tooling: { to: '/pattern-room', word: 'Pattern room' },
+  press: null,
+  hours: { to: '/bench', word: 'Bench' },
+};
+
+function Remedy({ about }: { about: CheckAnswer['about'] }) {
+  const remedy = remedies[about];
+  return remedy && <TextLink to={remedy.to}>{remedy.word}</TextLink>;
+}

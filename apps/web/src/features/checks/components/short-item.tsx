@@ -1,0 +1,101 @@
+import type { ShortForRuns } from '@hidewright/contract';
+import { KeyFigures } from '../../../components/key-figures.tsx';
+import { areaText, countText, dayText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { WeeksPicture } from './weeks-picture.tsx';
+
+/** What is short of one thing, by when it can be here, and how it goes on: a picture, and the same as a table. */
+export function ShortItem({ item }: { item: ShortForRuns }) {
+  const { today, areaUnit } = useWorkshop();
+  const say = (value: string) =>
+    item.unit === 'mm2' ? areaText(value, areaUnit, 1) : countText(Number(value));
+  return (
+    <section
+      aria-label={item.name}
+      className="border-t border-stitch pt-4 first:border-t-0 first:pt-0"
+    >
+      <h3 className="mb-3 font-semibold">{item.name}</h3>
+      <KeyFigures
+        figures={[
+          {
+            word: item.of === 'leather' ? 'to cut from, on hand' : 'on hand',
+            figure: say(item.onHand),
+            note:
+              Number(item.reserved) > 0 ? `${say(item.reserved)} of it held` : 'none of it held',
+          },
+          { word: 'on order', figure: say(item.onOrder) },
+          { word: 'needed for these', figure: say(item.needed) },
+          { word: 'to buy', figure: say(item.buy), note: draftedWords(item) },
+          {
+            word: 'ordered today, here by',
+            figure: item.arrivesOn === null ? 'not known' : dayText(item.arrivesOn, today),
+            note: item.supplierName ?? 'nobody is named who sells it',
+          },
+        ]}
+      />
+      <WeeksPicture item={item} say={say} />
+      <details>
+        <summary className="min-h-11 rounded py-2.5">Day by day</summary>
+        <WeeksTable item={item} say={say} />
+      </details>
+    </section>
+  );
+}
+
+function draftedWords({ drafted, drafts }: ShortForRuns): string | undefined {
+  return Number(drafted) > 0 ? `on draft ${drafts.join(' and ')}` : undefined;
+}
+
+function WeeksTable({ item, say }: { item: ShortForRuns; say: (value: string) => string }) {
+  const { today } = useWorkshop();
+  return (
+    <div
+      className="overflow-x-auto"
+      tabIndex={0}
+      role="region"
+      aria-label={`${item.name}, day by day`}
+    >
+      <table className="w-full text-left">
+        <thead>
+          <tr className="text-sm text-ink-soft">
+            <th scope="col" className="py-1 pr-3 font-normal">
+              Day
+            </th>
+            <th scope="col" className="py-1 pr-3 text-right font-normal">
+              Comes
+            </th>
+            <th scope="col" className="py-1 pr-3 text-right font-normal">
+              Goes
+            </th>
+            <th scope="col" className="py-1 text-right font-normal">
+              Free then
+            </th>
+          </tr>
+        </thead>
+        <tbody>
+          {item.days.map((each) => (
+            <tr key={each.day} className="border-t border-stitch/60 align-top">
+              <th scope="row" className="py-1.5 pr-3 font-normal">
+                {dayText(each.day, today)}
+                <span className="block text-sm text-ink-soft">{each.what.join(', ')}</span>
+              </th>
+              <td className="py-1.5 pr-3 text-right">
+                {Number(each.comes) > 0 ? say(each.comes) : '–'}
+              </td>
+              <td className="py-1.5 pr-3 text-right">
+                {Number(each.goes) > 0 ? say(each.goes) : '–'}
+              </td>
+              <td className="py-1.5 text-right whitespace-nowrap">
+                {Number(each.left) < 0 ? (
+                  <strong className="font-semibold text-oxblood">{`${say(each.left.slice(1))} short`}</strong>
+                ) : (
+                  say(each.left)
+                )}
+              </td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
+  );
+}

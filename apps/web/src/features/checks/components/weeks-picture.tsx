@@ -1,0 +1,82 @@
+import type { ShortForRuns } from '@hidewright/contract';
+import { addDays, daysBetween } from '@hidewright/domain';
+import { dayText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { weekSteps } from '../week-steps.ts';
+
+const [wide, high] = [600, 120];
+/** Two weeks at least, so that a single day is not stretched over the page. */
+const fewestDays = 14;
+
+/** What is free of an item over the coming weeks as a stepped line; below the bar it does not suffice. */
+export function WeeksPicture({
+  item,
+  say,
+}: {
+  item: ShortForRuns;
+  say: (value: string) => string;
+}) {
+  const { today } = useWorkshop();
+  const last = item.days.at(-1)?.day ?? today;
+  const days = Math.max(fewestDays, daysBetween(today, last) + 2);
+  const steps = weekSteps(item, today);
+  const [most, least] = [
+    Math.max(...steps.map(({ left }) => left)),
+    Math.min(...steps.map(({ left }) => left)),
+  ];
+  const [top, bottom] = [Math.max(0, most), Math.min(0, least)];
+  const y = (left: number) => 8 + ((top - left) / (top - bottom || 1)) * (high - 16);
+  const x = (after: number) => (after / days) * wide;
+  const path = steps
+    .map(({ after, left }, at) => `${at === 0 ? 'M 0' : `H ${x(after)} V`} ${y(left)}`)
+    .join(' ');
+  const out = item.runsOutOn === null ? null : x(daysBetween(today, item.runsOutOn));
+  const spoken = `${item.name}: ${say(String(steps[0]?.left ?? 0))} free today${item.runsOutOn === null ? '' : `, too little from ${dayText(item.runsOutOn, today)}`}`;
+  return (
+    <figure className="my-3">
+      <svg
+        viewBox={`0 0 ${wide} ${high}`}
+        preserveAspectRatio="none"
+        role="img"
+        aria-label={spoken}
+        className="h-28 w-full rounded bg-manila/40"
+      >
+        <rect x="0" y={y(0)} width={wide} height={high - y(0)} className="fill-oxblood-pale" />
+        <line
+          x1="0"
+          x2={wide}
+          y1={y(0)}
+          y2={y(0)}
+          className="stroke-edge"
+          vectorEffect="non-scaling-stroke"
+        />
+        {out !== null && (
+          <line
+            x1={out}
+            x2={out}
+            y1="0"
+            y2={high}
+            strokeDasharray="4 4"
+            strokeWidth="2"
+            className="stroke-oxblood"
+            vectorEffect="non-scaling-stroke"
+          />
+        )}
+        <path
+          d={`${path} H ${wide}`}
+          fill="none"
+          strokeWidth="3"
+          className="stroke-verdigris"
+          vectorEffect="non-scaling-stroke"
+        />
+      </svg>
+      <figcaption className="mt-1 flex flex-wrap justify-between gap-x-4 text-sm text-ink-soft">
+        <span>{dayText(today, today)}</span>
+        {item.runsOutOn !== null && (
+          <span className="text-oxblood">{`too little from ${dayText(item.runsOutOn, today)}`}</span>
+        )}
+        <span>{dayText(addDays(today, days), today)}</span>
+      </figcaption>
+    </figure>
+  );
+}
