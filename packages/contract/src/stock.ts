@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
-import { areaMm2, count, id, line, page, pageQuery } from './fields.ts';
+import { areaMm2, count, day, id, line, page, pageQuery } from './fields.ts';
 
 export const movementKinds = ['receive', 'take', 'return', 'reject', 'adjust', 'count'] as const;
 export type MovementKind = (typeof movementKinds)[number];

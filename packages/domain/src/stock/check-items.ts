@@ -1,5 +1,5 @@
 import type { Day } from '../promise/day.ts';
-import type { Buying, ItemStock } from './check-stock.ts';
+import type { Sourcing, ItemStock } from './check-stock.ts';
 import {
   type Dated,
   type Drawn,
@@ -33,7 +33,7 @@ export interface ItemFacts extends Standing {
 
 interface Asked {
   pool: PromisePool;
-  buying: Buying;
+  buying: Sourcing;
   needed: number;
   /** when it is needed */
   day: Day;
@@ -82,7 +82,7 @@ export function drawItem(
   };
 }
 
-export const lessDrafted = (buying: Buying, used: number): Buying => ({
+export const lessDrafted = (buying: Sourcing, used: number): Sourcing => ({
   ...buying,
   drafted: buying.drafted - used,
 });

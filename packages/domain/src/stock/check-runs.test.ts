@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { addDays } from '../promise/day.ts';
 import { checkRuns } from './check-runs.ts';
 import type {
-  Buying,
+  Sourcing,
   ItemStock,
   LeatherStock,
   RackLot,
@@ -21,13 +21,13 @@ import {
 
 const today = '2026-12-01';
 const say: Say = { area: (area) => `${area.toFixed()} mm²`, day: (day) => day };
-const fittings: Buying = {
+const fittings: Sourcing = {
   supplier: 'Fennbridge Fittings',
   arrivesOn: '2026-12-04',
   drafted: 0,
   drafts: [],
 };
-const nobody: Buying = { supplier: null, arrivesOn: null, drafted: 0, drafts: [] };
+const nobody: Sourcing = { supplier: null, arrivesOn: null, drafted: 0, drafts: [] };
 
 const lot = (lotId: number, panels: number, change: Partial<RackLot> = {}): RackLot => ({
   lotId,

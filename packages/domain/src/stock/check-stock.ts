@@ -6,7 +6,7 @@ import type { CutFrom, LotToCut } from './pieces-from-lot.ts';
 import type { PromisePool } from './promise-pool.ts';
 
 /** Where more of an item comes from. */
-export interface Buying {
+export interface Sourcing {
   /** null where nobody is named who sells it */
   supplier: string | null;
   /** when it is here if it is ordered today; null where nobody is named */
@@ -26,7 +26,7 @@ export interface ItemStock {
   kind: 'hardware' | 'supplies';
   packSize: number;
   pool: PromisePool;
-  buying: Buying;
+  buying: Sourcing;
 }
 
 export interface RackLot extends Omit<LotToCut, 'laid'> {
@@ -50,7 +50,7 @@ export interface LeatherStock {
   whole: { form: string; areaMm2: DecimalText } | null;
   /** the share of what is bought that can be cut */
   usablePercent: DecimalText;
-  buying: Buying;
+  buying: Sourcing;
 }
 
 export interface ToolStock {

@@ -5,7 +5,7 @@ import type { Day } from '../promise/day.ts';
 import type { ItemFacts, Standing } from './check-items.ts';
 import type { LeatherFacts, LotTaken } from './check-leather.ts';
 import type { HoursFacts } from './check-runs.ts';
-import type { Buying } from './check-stock.ts';
+import type { Sourcing } from './check-stock.ts';
 import type { ToolFacts } from './check-tools.ts';
 import { leatherToBuy } from './what-to-buy.ts';
 
@@ -91,7 +91,7 @@ function comes({ coming, enoughOn }: Standing, say: Say): string {
   return `comes${withPaper}${enoughOn === null ? '' : ` by ${say.day(enoughOn)}`}`;
 }
 
-function remedy(standing: Standing, buying: Buying, buy: string | null, say: Say): string[] {
+function remedy(standing: Standing, buying: Sourcing, buy: string | null, say: Say): string[] {
   const { enoughOn } = standing;
   const late = lateWords(buying);
   if (standing.buy === 0) return [`The rest ${comes(standing, say)}.`, ...late];
@@ -108,7 +108,7 @@ function remedy(standing: Standing, buying: Buying, buy: string | null, say: Say
   return [...drafted, ...(buy === null ? [] : [buy]), ...when, ...late];
 }
 
-const lateWords = ({ overdue = [] }: Buying): string[] =>
+const lateWords = ({ overdue = [] }: Sourcing): string[] =>
   overdue.length === 0
     ? []
     : [`${overdue.join(' and ')} should have brought some by now: ask when it comes.`];

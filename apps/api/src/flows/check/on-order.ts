@@ -1,4 +1,4 @@
-import type { Buying, Dated } from '@hidewright/domain';
+import type { Sourcing, Dated } from '@hidewright/domain';
 import { addDays, addWorkdays, isWorkday } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { Supplier } from '../../modules/suppliers/supplier.entity.ts';
@@ -72,7 +72,7 @@ export function buyingFrom(
   supplier: Supplier | undefined,
   today: string,
   { drafted, drafts, overdue }: OnOrder,
-): Buying {
+): Sourcing {
   return {
     supplier: supplier?.name ?? null,
     arrivesOn: supplier === undefined ? null : arrival(today, supplier.leadDays),

@@ -3,7 +3,7 @@ import {
   comingWeeks,
   usableAreaMm2,
   Exact,
-  type Buying,
+  type Sourcing,
   type Change,
   type ComingWeeks,
   type Dated,
@@ -107,7 +107,7 @@ const itemShort = (item: ItemStock, around: Around): ShortForRuns =>
 function describe(
   head: Pick<ShortForRuns, 'of' | 'id' | 'name' | 'unit'>,
   around: Around,
-  stock: { pool: ItemStock['pool']; buying: Buying; text: (quantity: number) => string },
+  stock: { pool: ItemStock['pool']; buying: Sourcing; text: (quantity: number) => string },
 ): ShortForRuns {
   const { asked, counted } = around;
   const { pool, buying, text } = stock;

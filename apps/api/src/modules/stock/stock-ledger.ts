@@ -157,7 +157,7 @@ export async function rejectStock(
       free > 0 ? [`send back up to ${say(free)}`] : [],
     );
   }
-  const value = (await costOf(work.em, asked, quantity)).negated();
+  const value = (await costOfGoing(work.em, asked, quantity)).negated();
   return move(work, asked, { kind: 'reject', quantity: -quantity, value, purchaseOrderId, reason });
 }
 
