@@ -1,5 +1,5 @@
 import type { PurchaseLineTyped } from '@hidewright/contract';
-import { leatherToBuy, packsToBuy, type Buying, type Standing } from '@hidewright/domain';
+import { leatherToBuy, packsToBuy, type Sourcing, type Standing } from '@hidewright/domain';
 import { priceText } from '../http/decimal-text.ts';
 import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { Leather } from '../modules/leathers/leather.entity.ts';
@@ -25,7 +25,7 @@ interface ToBuy {
 /** What is lacking of one thing over all runs. */
 interface Lacking {
   name: string;
-  buying: Buying;
+  buying: Sourcing;
   /** Beyond what is drafted already. */
   missing: number;
   drafted: number;
@@ -76,7 +76,7 @@ const standings = (
   of: (run: CheckedRun) => readonly Standing[],
 ): Standings => runs.flatMap((run) => of(run).map((standing) => ({ run, standing })));
 
-function lackingOf(name: string, buying: Buying, all: Standings): Lacking {
+function lackingOf(name: string, buying: Sourcing, all: Standings): Lacking {
   const short = all.filter(({ standing }) => standing.buy > 0);
   const sum = (part: 'buy' | 'drafted') =>
     short.reduce((total, { standing }) => total + standing[part], 0);

@@ -97,7 +97,7 @@ describe('Can we make it?', () => {
     expect(facts).toMatchObject({ ok: true, earliest: today, startBy: '2026-12-10', turn: 1 });
     expect(leatherWords(facts!.leather, say)).toBe('Russet: take 600000 mm² from L-1.');
     expect(lotWords(facts!.leather.takes[0]!)).toBe(
-      '5 panels for 60 pieces, by its usable share; 5 more stay',
+      '5 panels for 60 pieces, by its usable share; 5 more fit',
     );
     expect(hardwareWords(facts!.items[0]!, say)).toBe('Rivet: take 60 of 300 free.');
     expect(toolWords(facts!.tools[0]!)).toBe('Cutting die 7: ready, 5,000 strikes left in it.');

@@ -113,14 +113,16 @@ const lateWords = ({ overdue = [] }: Sourcing): string[] =>
     ? []
     : [`${overdue.join(' and ')} should have brought some by now: ask when it comes.`];
 
-/** What a lot is gone to for: "6 panels for 54 pieces by its usable share; 4 stay". */
+/** What a lot is gone to for: "6 panels for 54 pieces, by its usable share; 4 more fit". */
 export function lotWords({ by, units, pieces, unitsLeft }: LotTaken): string {
-  if (by === 'layout') {
-    return `${countWords(pieces)} pieces by its layout; room for ${countWords(unitsLeft)} more stays`;
-  }
+  const more =
+    unitsLeft === 0
+      ? 'no more fit'
+      : `${countWords(unitsLeft)} more ${unitsLeft === 1 ? 'fits' : 'fit'}`;
+  if (by === 'layout') return `${countWords(pieces)} pieces by its layout; ${more}`;
   const how = by === 'area' ? ', by its usable share' : '';
   const panels = `${countWords(units)} ${units === 1 ? 'panel' : 'panels'}`;
-  return `${panels} for ${countWords(pieces)} pieces${how}; ${unitsLeft === 0 ? 'none' : countWords(unitsLeft)} more ${unitsLeft === 1 ? 'stays' : 'stay'}`;
+  return `${panels} for ${countWords(pieces)} pieces${how}; ${more}`;
 }
 
 export function toolWords({ need, tool, ok, strikesNeeded, strikesLeft }: ToolFacts): string {

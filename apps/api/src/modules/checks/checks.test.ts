@@ -166,7 +166,7 @@ describe('Can we make them?', () => {
     expect(byLayout?.lots[0]).toMatchObject({ by: 'layout' });
     const { cutCount = 0 } = byLayout ?? {};
     expect(byLayout?.lots[0]?.sentence).toBe(
-      `${cutCount} pieces by its layout; room for ${laid.body.pieces - cutCount} more stays`,
+      `${cutCount} pieces by its layout; ${laid.body.pieces - cutCount} more fit`,
     );
   });
 });

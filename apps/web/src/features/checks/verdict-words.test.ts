@@ -1,6 +1,6 @@
 import type { CheckAnswer } from '@hidewright/contract';
 import { describe, expect, it } from 'vitest';
-import { mendedWords, shortWords } from './verdict-words.ts';
+import { inTimeWords, mendedWords, shortWords } from './verdict-words.ts';
 
 const answer = (about: CheckAnswer['about'], enough: boolean): CheckAnswer => ({
   about,
@@ -33,10 +33,28 @@ describe('the verdict in words', () => {
       'It can be packed by Wed 9 Dec, if what is short is ordered today.',
     );
     expect(mendedWords({ ...run, answers: [answer('tooling', false)] }, '2026-12-01')).toContain(
-      'and the tooling is here',
+      'if the tooling is here',
+    );
+    expect(mendedWords({ ...run, earliestDay: '2026-12-02' }, '2026-12-01')).toBe(
+      'It can still be packed in time, if what is short is ordered today.',
+    );
+    const busy = { ...run, answers: [answer('hours', false)] };
+    expect(mendedWords(busy, '2026-12-01')).toBe(
+      'It can be packed by Wed 9 Dec, if nothing else comes first.',
     );
     expect(mendedWords({ ...run, earliestDay: null }, '2026-12-01')).toBe(
       'Nobody can tell yet by when it could be packed.',
     );
+  });
+
+  it('says whether a yes counts on what is yet to come', () => {
+    const run = {
+      ...{ quantity: 1, cutCount: 1, containers: 1, yes: true, lots: [], notes: [] },
+      ...{ by: '2026-12-10', startBy: '2026-12-09', earliestDay: '2026-12-09' },
+    };
+    const said = (freeNow: string) =>
+      inTimeWords({ ...run, answers: [{ ...answer('hardware', true), freeNow }] }, '2026-12-01');
+    expect(said('1')).toBe('In time: everything is there.');
+    expect(said('0')).toBe('In time, if what is on order is here by Wed 9 Dec.');
   });
 });

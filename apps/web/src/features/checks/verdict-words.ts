@@ -29,10 +29,30 @@ export function mendedWords(
   { answers, earliestDay, by }: Pick<RunCheck, 'answers' | 'earliestDay' | 'by'>,
   today: string,
 ): string {
-  const toolingShort = answers.some(({ about, enough }) => about === 'tooling' && !enough);
   if (earliestDay === null) return 'Nobody can tell yet by when it could be packed.';
-  if (earliestDay <= by)
-    return toolingShort ? 'With the tooling here, it can be packed in time.' : '';
-  const proviso = toolingShort ? ' and the tooling is here' : '';
-  return `It can be packed by ${dayText(earliestDay, today)}, if what is short is ordered today${proviso}.`;
+  if (earliestDay <= by) {
+    return `It can still be packed in time, if ${conditions(answers)}.`;
+  }
+  return `It can be packed by ${dayText(earliestDay, today)}, if ${conditions(answers)}.`;
+}
+
+/** What has to happen for the day to hold. */
+function conditions(answers: readonly CheckAnswer[]): string {
+  const short = (...kinds: CheckAnswer['about'][]) =>
+    answers.some(({ about, enough }) => !enough && kinds.includes(about));
+  const all = [
+    ...(short('leather', 'hardware', 'supplies') ? ['what is short is ordered today'] : []),
+    ...(short('tooling') ? ['the tooling is here'] : []),
+    ...(short('press') ? ['a press is found for it'] : []),
+  ];
+  return all.length === 0 ? 'nothing else comes first' : listed(all);
+}
+
+/** When what is on hand and what comes must be there. */
+export function inTimeWords({ answers, startBy }: RunCheck, today: string): string {
+  const stock = answers.filter(({ unit }) => unit === 'mm2' || unit === 'piece');
+  const waits = stock.some(({ needed, freeNow }) => needed !== freeNow);
+  return waits
+    ? `In time, if what is on order is here by ${dayText(startBy, today)}.`
+    : 'In time: everything is there.';
 }

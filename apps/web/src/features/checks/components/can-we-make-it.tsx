@@ -8,7 +8,7 @@ import { ApiProblem } from '../../../lib/api-problem.ts';
 import { countText, dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { checkQuery } from '../checks.queries.ts';
-import { mendedWords, shortWords } from '../verdict-words.ts';
+import { inTimeWords, mendedWords, shortWords } from '../verdict-words.ts';
 import { CheckAnswers } from './check-answers.tsx';
 import { DraftOrders } from './draft-orders.tsx';
 
@@ -92,18 +92,21 @@ const lacksStock = ({ answers }: RunCheck): boolean =>
       !enough && (about === 'leather' || about === 'hardware' || about === 'supplies'),
   );
 
+const mendable = ({ earliestDay, by }: RunCheck): boolean =>
+  earliestDay !== null && earliestDay <= by;
+
 function Verdict({ check }: { check: RunCheck }) {
   const { today } = useWorkshop();
   const by = dayText(check.by, today);
   if (check.yes) {
     return (
       <Notice tone="ok" live title={`Yes, by ${by}.`}>
-        Nothing is held until it is taken on.
+        {`${inTimeWords(check, today)} Nothing is held until it is taken on.`}
       </Notice>
     );
   }
   return (
-    <Notice tone="danger" live title={`Not by ${by}:`}>
+    <Notice tone="danger" live title={mendable(check) ? `Not yet for ${by}:` : `Not by ${by}:`}>
       {`${shortWords(check.answers)} ${mendedWords(check, today)}`}
     </Notice>
   );

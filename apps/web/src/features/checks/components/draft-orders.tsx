@@ -1,4 +1,5 @@
-import { draftShort, type BodyInputOf, type ReplyOf } from '@hidewright/contract';
+import type { draftShort } from '@hidewright/contract';
+import type { BodyInputOf, ReplyOf } from '@hidewright/contract';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Notice } from '../../../components/notice.tsx';

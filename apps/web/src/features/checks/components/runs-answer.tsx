@@ -5,7 +5,7 @@ import { Notice } from '../../../components/notice.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { countText, dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { mendedWords, shortWords } from '../verdict-words.ts';
+import { inTimeWords, mendedWords, shortWords } from '../verdict-words.ts';
 import { CheckAnswers } from './check-answers.tsx';
 import { DraftOrders } from './draft-orders.tsx';
 import type { AskedRuns } from './runs-form.tsx';
@@ -82,7 +82,7 @@ function RunCard({ run }: { run: RunsCheck['runs'][number] }) {
         <StateMark state={run.yes ? 'received' : 'short'}>{run.yes ? 'yes' : 'not so'}</StateMark>
         <span className="min-w-0 grow basis-64">
           {run.yes
-            ? `In time, if leather and hardware are there by ${dayText(run.startBy, today)}.`
+            ? inTimeWords(run, today)
             : `By ${by} ${shortWords(run.answers)} ${mendedWords(run, today)}`}
         </span>
       </p>

@@ -49,53 +49,46 @@ function draftedWords({ drafted, drafts }: ShortForRuns): string | undefined {
 function WeeksTable({ item, say }: { item: ShortForRuns; say: (value: string) => string }) {
   const { today } = useWorkshop();
   return (
-    <div
-      className="overflow-x-auto"
-      tabIndex={0}
-      role="region"
-      aria-label={`${item.name}, day by day`}
-    >
-      <table className="w-full text-left">
-        <thead>
-          <tr className="text-sm text-ink-soft">
-            <th scope="col" className="py-1 pr-3 font-normal">
-              Day
+    <table className="w-full text-left">
+      <thead>
+        <tr className="text-sm text-ink-soft">
+          <th scope="col" className="py-1 pr-3 font-normal">
+            Day
+          </th>
+          <th scope="col" className="py-1 pr-3 text-right font-normal">
+            Comes
+          </th>
+          <th scope="col" className="py-1 pr-3 text-right font-normal">
+            Goes
+          </th>
+          <th scope="col" className="py-1 text-right font-normal">
+            Free then
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {item.days.map((each) => (
+          <tr key={each.day} className="border-t border-stitch/60 align-top">
+            <th scope="row" className="py-1.5 pr-3 font-normal">
+              {dayText(each.day, today)}
+              <span className="block text-sm text-ink-soft">{each.what.join(', ')}</span>
             </th>
-            <th scope="col" className="py-1 pr-3 text-right font-normal">
-              Comes
-            </th>
-            <th scope="col" className="py-1 pr-3 text-right font-normal">
-              Goes
-            </th>
-            <th scope="col" className="py-1 text-right font-normal">
-              Free then
-            </th>
+            <td className="py-1.5 pr-3 text-right">
+              {Number(each.comes) > 0 ? say(each.comes) : '–'}
+            </td>
+            <td className="py-1.5 pr-3 text-right">
+              {Number(each.goes) > 0 ? say(each.goes) : '–'}
+            </td>
+            <td className="py-1.5 text-right whitespace-nowrap">
+              {Number(each.left) < 0 ? (
+                <strong className="font-semibold text-oxblood">{`${say(each.left.slice(1))} short`}</strong>
+              ) : (
+                say(each.left)
+              )}
+            </td>
           </tr>
-        </thead>
-        <tbody>
-          {item.days.map((each) => (
-            <tr key={each.day} className="border-t border-stitch/60 align-top">
-              <th scope="row" className="py-1.5 pr-3 font-normal">
-                {dayText(each.day, today)}
-                <span className="block text-sm text-ink-soft">{each.what.join(', ')}</span>
-              </th>
-              <td className="py-1.5 pr-3 text-right">
-                {Number(each.comes) > 0 ? say(each.comes) : '–'}
-              </td>
-              <td className="py-1.5 pr-3 text-right">
-                {Number(each.goes) > 0 ? say(each.goes) : '–'}
-              </td>
-              <td className="py-1.5 text-right whitespace-nowrap">
-                {Number(each.left) < 0 ? (
-                  <strong className="font-semibold text-oxblood">{`${say(each.left.slice(1))} short`}</strong>
-                ) : (
-                  say(each.left)
-                )}
-              </td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+        ))}
+      </tbody>
+    </table>
   );
 }
