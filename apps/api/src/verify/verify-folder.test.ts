@@ -48,6 +48,16 @@ describe('verifying a data folder', () => {
 
   it.each([
     [
+      'a part that is a kit',
+      'INSERT INTO kit_part (kit_id, hardware_id, quantity) SELECT hardware_id, 1, 1 FROM kit_part LIMIT 1',
+      'No part of a kit is a kit',
+    ],
+    [
+      'an offer that asks more for more',
+      `UPDATE supplier_offer SET breaks = '[{"from":"1","price":"1"},{"from":"5","price":"2"}]'`,
+      'asks no more each for more',
+    ],
+    [
       'one movement',
       'UPDATE stock_movement SET quantity = quantity + 1 WHERE id = (SELECT MAX(id) FROM stock_movement)',
       'sum of its movements',

@@ -4,6 +4,7 @@ import { databaseFile } from '../config.ts';
 import { bookRules } from './book-rules.ts';
 import { buyingRules } from './buying-rules.ts';
 import { fileRules } from './file-rules.ts';
+import { itemRules } from './item-rules.ts';
 import { quoteRules } from './quote-rules.ts';
 import type { Query } from './rule.ts';
 import { stockRules } from './stock-rules.ts';
@@ -21,6 +22,7 @@ const rules = [
   ...quoteRules,
   ...workRules,
   ...bookRules,
+  ...itemRules,
 ];
 
 /** Checks every rule on a read-only connection. */

@@ -142,6 +142,10 @@ describe('what stands in for another', () => {
     await change(brass, { standIns: [{ hardwareId: nickel, bothWays: false }] });
     expect((await read(nickel)).standIns).toEqual([]);
     expect((await read(brass)).standIns).toMatchObject([{ hardwareId: nickel, bothWays: false }]);
+    const parts = [{ hardwareId: cap, quantity: 2 }];
+    const byKit = await add({ name: 'Ring of caps', unitPrice: '1', parts }).expect(201);
+    await change(brass, { standIns: [{ hardwareId: byKit.body.id, bothWays: false }] });
+    expect((await read(brass)).standIns).toMatchObject([{ name: 'Ring of caps', free: 125 }]);
     const self = await change(brass, { standIns: [{ hardwareId: brass, bothWays: false }] });
     expect(self.body.errors[0].field).toBe('standIns.0.hardwareId');
   });

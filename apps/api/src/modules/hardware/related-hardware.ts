@@ -1,6 +1,6 @@
 import type { Hardware as HardwareReply } from '@hidewright/contract';
 import type { EntityManager } from '@mikro-orm/sqlite';
-import { partStock, type PartStock } from './kit-counts.ts';
+import { kitCounts, partStock, type PartStock } from './kit-counts.ts';
 
 /** What hardware has to do with other hardware. */
 export interface Related {
@@ -32,12 +32,21 @@ const standInsSql = `SELECT s.hardware_id AS of_id, h.id, h.name,
   FROM stand_in s JOIN hardware h ON h.id = s.by_hardware_id LEFT JOIN stock_balance b ON b.hardware_id = h.id
   WHERE s.hardware_id IN (SELECT value FROM json_each(?)) ORDER BY s.id`;
 
-/** Parts, kits and stand-ins of a page of hardware, in three queries. */
+/** Parts, kits and stand-ins of a page of hardware, in four queries. */
 export async function readRelated(em: EntityManager, ids: readonly number[]): Promise<Related> {
   const asked = [JSON.stringify(ids)];
   const parts = await partStock(em, ids);
   const kits = await em.execute<InKit[]>(inKitsSql, asked);
   const standIns = await em.execute<StandInRow[]>(standInsSql, asked);
+  // What stands in can be a kit, which is as many as its own parts make up.
+  const others = await partStock(
+    em,
+    standIns.map(({ id }) => id),
+  );
+  const freeOf = (row: StandInRow) => {
+    const own = others.filter(({ kitId }) => kitId === row.id);
+    return own.length === 0 ? row.free : kitCounts(own).free;
+  };
   const partsOf = (id: number) => parts.filter(({ kitId }) => kitId === id);
   return {
     partsOf,
@@ -54,7 +63,7 @@ export async function readRelated(em: EntityManager, ids: readonly number[]): Pr
           hardwareId: row.id,
           name: row.name,
           bothWays: row.both_ways === 1,
-          free: row.free,
+          free: freeOf(row),
         })),
     }),
   };

@@ -1,6 +1,7 @@
 import type { Hardware } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { lengthText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { lengthFigure } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { countedText, unitWord } from '../unit-words.ts';
 
@@ -55,9 +56,8 @@ function Details({ hardware }: { hardware: Hardware }) {
   const length = (mm: string) => lengthText(mm, lengthUnit, lengthUnit === 'mm' ? 2 : 3);
   const stack =
     stackMaxMm !== null &&
-    (stackMinMm === null
-      ? `up to ${length(stackMaxMm)}`
-      : `${length(stackMinMm)} to ${length(stackMaxMm)}`);
+    (stackMinMm === null ? 'up to ' : `${lengthFigure(stackMinMm, lengthUnit, 3)} to `) +
+      length(stackMaxMm);
   const figures = [
     { word: 'Metal', figure: metal },
     { word: 'Colour', figure: colour },

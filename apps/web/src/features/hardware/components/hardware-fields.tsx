@@ -28,6 +28,7 @@ interface HardwareFieldsProps {
 export function HardwareFields({ suppliers, own }: HardwareFieldsProps) {
   const parts = useWatch({ name: 'parts' }) as unknown[] | undefined;
   const isKit = (parts?.length ?? 0) > 0;
+  const unit = useWatch({ name: 'unit' }) as HardwareUnit | undefined;
   const choices = useOtherHardware(own);
   return (
     <>
@@ -36,7 +37,7 @@ export function HardwareFields({ suppliers, own }: HardwareFieldsProps) {
       <PriceField isKit={isKit} />
       {!isKit && (
         <>
-          <NumberField name="packSize" label="In packs of" unit="pieces" />
+          <NumberField name="packSize" label="In packs of" unit={unitWord(unit ?? 'piece', 2)} />
           <NumberField
             name="reorderAt"
             label="Keep at least"

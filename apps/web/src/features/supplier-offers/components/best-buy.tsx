@@ -18,7 +18,7 @@ export function BestBuy({ offers }: { offers: readonly SupplierOfferReply[] }) {
   const wrong = text.trim() !== '' && needed === undefined;
   const sign = unit === 'mm2' ? areaUnits[workshop.areaUnit].sign : 'pieces';
   return (
-    <div className="mt-5 border-t border-line pt-4">
+    <div className="mt-5 border-t border-stitch pt-4">
       <PlainField
         label={unit === 'mm2' ? 'So much is needed' : 'So many are needed'}
         unit={sign}

@@ -31,7 +31,7 @@ export function OfferItem({ offer, suppliers, ownPrice, isOwner }: OfferItemProp
     soldText(offer, workshop),
   ];
   return (
-    <li className="border-t border-line pt-4 first:border-t-0 first:pt-0">
+    <li className="border-t border-stitch pt-4 first:border-t-0 first:pt-0">
       <div className="flex flex-wrap items-baseline gap-x-3">
         <h3 className="text-base font-semibold">
           <TextLink to={`/stockroom/suppliers/${offer.supplierId}`}>{offer.supplierName}</TextLink>

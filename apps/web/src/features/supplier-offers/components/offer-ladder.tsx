@@ -31,7 +31,7 @@ export function OfferLadder({ offer }: { offer: SupplierOfferReply }) {
       </thead>
       <tbody>
         {breaks.map((each, at) => (
-          <tr key={each.from} className="border-t border-line">
+          <tr key={each.from} className="border-t border-stitch">
             <td className="py-1 pr-6">{from(each.from, at)}</td>
             <td className="py-1 text-right font-semibold tabular-nums">{price(each.price)}</td>
           </tr>
