@@ -19,6 +19,7 @@ import { designRoutes } from './modules/designs/designs.routes.ts';
 import { hardwareRoutes } from './modules/hardware/hardware.routes.ts';
 import { invoiceRoutes } from './modules/invoices/invoices.routes.ts';
 import { jobRoutes } from './modules/jobs/jobs.routes.ts';
+import { labelRoutes } from './modules/labels/labels.routes.ts';
 import { layoutRoutes } from './modules/layouts/layouts.routes.ts';
 import { leatherRoutes } from './modules/leathers/leathers.routes.ts';
 import { linkRoutes } from './modules/links/links.routes.ts';
@@ -89,6 +90,7 @@ const rooms: ((context: Context) => Router)[] = [
   stockRoutes,
   stockLevelRoutes,
   countRoutes,
+  labelRoutes,
   invoiceRoutes,
   taxRateRoutes,
   periodRoutes,

@@ -9,6 +9,7 @@ import type { Endpoint } from './endpoint.ts';
 import * as hardware from './hardware.ts';
 import * as invoices from './invoices.ts';
 import * as jobs from './jobs.ts';
+import * as labels from './labels.ts';
 import * as layouts from './layouts.ts';
 import * as learned from './learned.ts';
 import * as leathers from './leathers.ts';
@@ -86,6 +87,7 @@ const rooms: Record<string, unknown>[] = [
   stock,
   stockLevels,
   counts,
+  labels,
   invoices,
   taxRates,
   periods,

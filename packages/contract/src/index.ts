@@ -14,6 +14,7 @@ export * from './hardware.ts';
 export * from './invoices.ts';
 export * from './job-ticket.ts';
 export * from './jobs.ts';
+export * from './labels.ts';
 export * from './layout-asked.ts';
 export * from './layouts.ts';
 export * from './learned.ts';

@@ -112,6 +112,7 @@ export * from './stock/production-lot.ts';
 export * from './stock/reorder-point.ts';
 export * from './stock/forecast.ts';
 export * from './stock/count-outcome.ts';
+export * from './stock/label-grid.ts';
 export * from './stock/scanned-tag.ts';
 export * from './stock/stock-cost.ts';
 export * from './stock/stock-layers.ts';

@@ -1,4 +1,5 @@
 import { drawInvoice } from './invoice-pdf.ts';
+import { drawLabels } from './label-sheet-pdf.ts';
 import { drawLayout } from './layout-pdf.ts';
 import { drawPurchaseOrder } from './purchase-order-pdf.ts';
 import { drawQuote } from './quote-pdf.ts';
@@ -9,6 +10,7 @@ export const papers = {
   quote: drawQuote,
   invoice: drawInvoice,
   purchaseOrder: drawPurchaseOrder,
+  labels: drawLabels,
   layout: drawLayout,
   template: drawTemplate,
 };

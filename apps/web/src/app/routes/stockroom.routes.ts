@@ -22,6 +22,11 @@ export const stockroomRoutes: RouteObject[] = [
         lazy: () => import('./stockroom/on-hand.tsx'),
       },
       {
+        path: 'tags',
+        handle: { crumb: 'Tags' },
+        lazy: () => import('./stockroom/labels.tsx'),
+      },
+      {
         path: 'counts',
         handle: { crumb: 'Counts' },
         children: [

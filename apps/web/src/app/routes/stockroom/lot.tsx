@@ -2,6 +2,7 @@ import type { Lot } from '@hidewright/contract';
 import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
 import { Ticket } from '../../../components/ticket.tsx';
@@ -44,6 +45,9 @@ export function Component() {
         number={lot.tag}
         title={lot.leatherName}
         detail={formText(lot, lengthUnit)}
+        actions={
+          handlesStock && <LinkButton to={`/stockroom/tags?lots=${id}`}>Print its tag</LinkButton>
+        }
       />
       <ItemLayout
         facts={

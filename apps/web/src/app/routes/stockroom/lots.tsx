@@ -30,9 +30,12 @@ export function Component() {
   if (!data) return <PageLoading />;
   const all = search.get('show') === 'all';
   const receive = handlesStock ? (
-    <LinkButton to="/stockroom/receive" tone="primary">
-      Receive a delivery
-    </LinkButton>
+    <>
+      <LinkButton to="/stockroom/tags">Print tags</LinkButton>
+      <LinkButton to="/stockroom/receive" tone="primary">
+        Receive a delivery
+      </LinkButton>
+    </>
   ) : undefined;
   return (
     <>

@@ -9,6 +9,7 @@ const items: SectionLink[] = [
   { to: '/stockroom/on-hand', word: 'On hand' },
   { to: '/stockroom/ledger', word: 'Ledger' },
   { to: '/stockroom/counts', word: 'Counts' },
+  { to: '/stockroom/tags', word: 'Tags' },
   { to: '/stockroom/scan', word: 'Scan' },
 ];
 
