@@ -1,0 +1,23 @@
+import { bestBuy } from '@hidewright/domain';
+import { expect, it } from 'vitest';
+import { buyMoreText } from './offer-words.ts';
+
+const workshop = { areaUnit: 'ft2' } as Parameters<typeof buyMoreText>[2];
+const offer = {
+  ...{ id: 1, leadDays: 3, preferred: true, minimum: null, multiple: null },
+  breaks: [
+    { from: '1', price: '0.2' },
+    { from: '200', price: '0.15' },
+    { from: '1000', price: '0.149' },
+  ],
+};
+
+it.each([
+  ['162', '38 more pieces cost 2.40 less: take 200 for 30.00.'],
+  ['150', '50 more pieces cost nothing more: 200 for 30.00.'],
+  ['146', '54 more pieces cost only 0.80 more: 200 for 30.00.'],
+  ['20', ''],
+])('for %s it says “%s”', (needed, said) => {
+  const [buy] = bestBuy({ needed, offers: [offer] });
+  expect(buy && buyMoreText(buy, 'piece', workshop)).toBe(said);
+});
