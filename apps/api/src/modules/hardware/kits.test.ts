@@ -120,6 +120,15 @@ describe('a kit', () => {
     expect(circle.body.errors[0].message).toContain('is a part of Rivet 9 mm');
   });
 
+  it('is sold by no supplier: its parts are', async () => {
+    const { body } = await owner().post('/api/suppliers').send({ name: 'Sells kits' });
+    const refused = await owner()
+      .post('/api/supplier-offers')
+      .send({ supplierId: body.id, hardwareId: kit.id, breaks: [{ from: '1', price: '1' }] })
+      .expect(422);
+    expect(refused.body.errors[0].message).toContain('is a kit');
+  });
+
   it('has no price of its parts without parts', async () => {
     const refused = await add({ name: 'Alone', unitPrice: '1', priceFromParts: true }).expect(422);
     expect(refused.body.errors).toMatchObject([{ field: 'priceFromParts' }]);

@@ -7,6 +7,7 @@ import { invalid, notFound } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
+import { KitPart } from '../hardware/kit-part.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { SupplierOffer } from './supplier-offer.entity.ts';
@@ -110,6 +111,10 @@ async function requireThing({ em }: Work, { leatherId, hardwareId }: Thing): Pro
     throw invalid([{ field: 'hardwareId', message: 'Choose hardware or supplies from the list.' }]);
   if (hardware.fromCustomer) {
     const message = `${hardware.name} comes from the customer: nobody is to be paid for it.`;
+    throw invalid([{ field: 'hardwareId', message }]);
+  }
+  if ((await em.count(KitPart, { kitId: hardware.id })) > 0) {
+    const message = `${hardware.name} is a kit: enter what its parts are sold at.`;
     throw invalid([{ field: 'hardwareId', message }]);
   }
 }

@@ -8,6 +8,8 @@ import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { PurchaseOrdersTable } from '../../../features/purchase-orders/components/purchase-orders-table.tsx';
 import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
+import { SoldList } from '../../../features/supplier-offers/components/sold-list.tsx';
+import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
 import { ChangeSupplierForm } from '../../../features/suppliers/components/change-supplier-form.tsx';
 import { SupplierFacts } from '../../../features/suppliers/components/supplier-facts.tsx';
 import { supplierQuery } from '../../../features/suppliers/suppliers.queries.ts';
@@ -18,6 +20,7 @@ export async function loader({ params }: LoaderFunctionArgs) {
   const id = Number(params['id']);
   const [supplier] = await Promise.all([
     queryClient.ensureQueryData(supplierQuery(id)),
+    queryClient.ensureQueryData(supplierOffersQuery({ supplierId: id })),
     queryClient.ensureInfiniteQueryData(purchaseOrdersQuery({ supplierId: id })),
   ]);
   return supplier;
@@ -44,12 +47,15 @@ export function Component() {
             <SupplierFacts supplier={supplier} />
           )}
         </Card>
-        <Card title="Orders to them">
-          <PurchaseOrdersTable
-            rows={orders?.pages.flatMap((page) => page.items) ?? []}
-            empty={<EmptyState title="Nothing was ordered from them yet." action={order} />}
-          />
-        </Card>
+        <div className="grid gap-5">
+          <SoldList supplierId={id} />
+          <Card title="Orders to them">
+            <PurchaseOrdersTable
+              rows={orders?.pages.flatMap((page) => page.items) ?? []}
+              empty={<EmptyState title="Nothing was ordered from them yet." action={order} />}
+            />
+          </Card>
+        </div>
       </div>
     </>
   );

@@ -1,0 +1,44 @@
+import type { SupplierOfferReply } from '@hidewright/contract';
+import { useQuery } from '@tanstack/react-query';
+import { Card } from '../../../components/card.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
+import { areaPriceText, unitPriceText } from '../../../lib/formatting.ts';
+import { areaUnits } from '../../../lib/units.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { supplierOffersQuery } from '../supplier-offers.queries.ts';
+
+/** What one supplier sells, as far as it was entered. */
+export function SoldList({ supplierId }: { supplierId: number }) {
+  const { data } = useQuery(supplierOffersQuery({ supplierId }));
+  const offers = data?.items ?? [];
+  if (offers.length === 0) return null;
+  return (
+    <Card title="What they sell" subtitle="as entered with each leather and hardware">
+      <ul className="space-y-2">
+        {offers.map((offer) => (
+          <SoldItem key={offer.id} offer={offer} />
+        ))}
+      </ul>
+    </Card>
+  );
+}
+
+function SoldItem({ offer }: { offer: SupplierOfferReply }) {
+  const { areaUnit, currency } = useWorkshop();
+  const { of, leatherId, hardwareId, name, breaks = [], articleNumber } = offer;
+  const prices = breaks.map(({ price }) =>
+    of === 'leather' ? areaPriceText(price, areaUnit) : unitPriceText(price),
+  );
+  const detail = [
+    articleNumber && `article ${articleNumber}`,
+    prices.length > 0 &&
+      `${prices.join(', ')} ${currency} per ${of === 'leather' ? areaUnits[areaUnit].sign : 'piece'}`,
+    offer.preferred && 'usually bought here',
+  ].filter(Boolean);
+  return (
+    <li>
+      <TextLink to={`/stockroom/${of}/${leatherId ?? hardwareId}`}>{name}</TextLink>
+      <p className="text-sm text-ink-soft">{detail.join(' · ')}</p>
+    </li>
+  );
+}
