@@ -1,0 +1,131 @@
+import type { Page } from 'playwright-core';
+import { afterAll, beforeAll, expect } from 'vitest';
+import { closeBrowser, phone } from '../support/browser.ts';
+import type { Hidewright } from '../support/hidewright.ts';
+import { startDemo } from '../support/made-demo.ts';
+import { settled, signInAs } from '../support/steps.ts';
+import { expectAccessible, expectNoOverflow, visit, walk } from '../support/walk.ts';
+
+let hidewright: Hidewright;
+beforeAll(async () => {
+  hidewright = await startDemo();
+});
+afterAll(async () => {
+  await closeBrowser();
+  await hidewright.stop();
+});
+
+interface Named {
+  items: { id: number; name: string }[];
+}
+
+async function goTo(page: Page, room: string, list: string, name: string): Promise<void> {
+  const read = await page.request.get(`${hidewright.url}/api/${list}?limit=200`);
+  const found = ((await read.json()) as Named).items.find((each) => each.name === name);
+  await visit(page, `${hidewright.url}/${room}/${found?.id}`);
+}
+
+walk(
+  'who sells it, at which price for more, and where a quantity costs least',
+  async ({ page }) => {
+    await signInAs(page, hidewright.url, 'owner');
+    await goTo(page, 'stockroom/hardware', 'hardware', 'Snaps, line 20, brass');
+    await page.getByRole('button', { name: 'Add what a supplier asks' }).click();
+    const dialog = page.getByRole('dialog');
+    await dialog.getByLabel('Supplier').selectOption({ label: 'Fennbridge Fittings' });
+    await dialog.getByLabel('Price', { exact: true }).fill('0.24');
+    await dialog.getByRole('button', { name: 'A lower price for more' }).click();
+    await dialog.getByLabel('From').nth(1).fill('1');
+    await dialog.getByLabel('Price', { exact: true }).nth(1).fill('0.20');
+    await dialog.getByRole('button', { name: 'Add the offer' }).click();
+    await dialog
+      .getByText('Line 2 begins where line 1 begins. Keep one of the two.')
+      .first()
+      .waitFor();
+    await expectAccessible(page);
+    await dialog.getByLabel('From').nth(1).fill('1000');
+    await dialog.getByRole('button', { name: 'Add the offer' }).click();
+    await page.getByText('usually bought here').waitFor();
+
+    await page.getByRole('button', { name: 'Add what a supplier asks' }).click();
+    await dialog.getByLabel('Supplier').selectOption({ label: 'Straightedge Dies' });
+    await dialog.getByLabel('Price', { exact: true }).fill('0.225');
+    await dialog.getByText('Article number, days, pack').click();
+    await dialog.getByLabel(/^Takes/).fill('2');
+    await dialog.getByLabel(/^In packs of/).fill('500');
+    await dialog.getByRole('button', { name: 'Add the offer' }).click();
+    await page.getByRole('heading', { name: 'Straightedge Dies' }).waitFor();
+
+    await page.getByLabel('So many are needed').fill('900');
+    await page.getByText('216.00 USD').waitFor();
+    await page.getByText('100 more pieces cost 16.00 less: take 1,000 for 200.00.').waitFor();
+    await page.getByText(/for 1,000 from Straightedge Dies, in 2 days/).waitFor();
+    await page.getByRole('button', { name: 'Use this price of Straightedge Dies' }).click();
+    await page.getByText('Quotes reckon with Straightedge Dies’s price now.').first().waitFor();
+    await expectAccessible(page);
+    await page.setViewportSize(phone);
+    await settled(page);
+    await expectAccessible(page);
+    await expectNoOverflow(page);
+  },
+);
+
+walk('a kit, and a post that does not suit the folded leather', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'owner');
+  await goTo(page, 'stockroom/hardware', 'hardware', 'Rivets 7 mm, antique brass');
+  await page.getByText('How it is set').click();
+  await page.getByLabel(/^Length of the post/).fill('8');
+  await page.getByLabel(/^Holds a stack from/).fill('5.5');
+  await page.getByLabel(/^to/).fill('6.5');
+  await page.getByRole('button', { name: 'Save' }).click();
+  await page.getByText('Rivets 7 mm, antique brass is saved.').first().waitFor();
+
+  await visit(page, `${hidewright.url}/stockroom/hardware/new`);
+  await page.getByLabel('Name', { exact: true }).fill('Rivets in a bag');
+  await page.getByText('Made up of other hardware').click();
+  await page.getByRole('button', { name: 'A part' }).click();
+  await page
+    .getByLabel('Part 1', { exact: true })
+    .selectOption({ label: 'Rivet caps 7 mm, nickel' });
+  await page.getByRole('button', { name: 'Another part' }).click();
+  await page
+    .getByLabel('Part 2', { exact: true })
+    .selectOption({ label: 'Rivet posts 8 mm, nickel' });
+  await page.getByLabel('In each').nth(1).fill('2');
+  await page.getByLabel('It costs what its parts cost').check();
+  await page.getByRole('button', { name: 'Add it' }).click();
+  await page.getByText('Made up by its parts').waitFor();
+  await page.getByText('what its parts cost').waitFor();
+  await expectAccessible(page);
+
+  await goTo(page, 'pattern-room/patterns', 'patterns', 'Luggage tag with neck');
+  await page
+    .getByText(/^.*The post is 8 mm and holds 5.5 to 6.5 mm. Two layers of .* too thin/)
+    .first()
+    .waitFor();
+  await expectAccessible(page);
+  await page.getByRole('link', { name: 'Change', exact: true }).click();
+  await page
+    .getByText(/too thin. Take a shorter one, or add a layer./)
+    .first()
+    .waitFor();
+});
+
+walk('a bin is weighed', async ({ page }) => {
+  await page.setViewportSize(phone);
+  await signInAs(page, hidewright.url, 'maker');
+  await goTo(page, 'stockroom/hardware', 'hardware', 'Rivet caps 7 mm, nickel');
+  await page.getByText('Count by weight').click();
+  await page.getByLabel('They weigh').fill('12.5');
+  await page.getByLabel('All weigh, with the tub').fill('237.5');
+  await page.getByLabel('Empty tub').fill('250');
+  await page.getByText('All of it weighs less than the empty tub. Weigh both again.').waitFor();
+  await page.getByLabel('Empty tub').fill('25');
+  await page.getByText('170 pieces, certain to the piece by this scale.').waitFor();
+  await expectAccessible(page);
+  await expectNoOverflow(page);
+  await page.getByRole('button', { name: 'Take 170' }).click();
+  await page.getByRole('button', { name: 'Set it' }).click();
+  await page.getByText('Adjusted by −30.').first().waitFor();
+  expect(await page.getByText(/USD/).count()).toBe(0);
+});
