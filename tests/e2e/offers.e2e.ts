@@ -95,7 +95,7 @@ walk('a kit, and a post that does not suit the folded leather', async ({ page })
   await page.getByLabel('It costs what its parts cost').check();
   await page.getByRole('button', { name: 'Add it' }).click();
   await page.getByText('Made up by its parts').waitFor();
-  await page.getByText('what its parts cost').waitFor();
+  await page.getByText('what its parts cost', { exact: true }).waitFor();
   await expectAccessible(page);
 
   await goTo(page, 'pattern-room/patterns', 'patterns', 'Luggage tag with neck');
