@@ -46,7 +46,12 @@ describe('tags', () => {
   });
 
   it('come as a PDF of the size that was asked for', async () => {
-    const { body, headers } = await print({ lots: lot.id, page: 'letter', rows: 5, start: 10 }).expect(200);
+    const { body, headers } = await print({
+      lots: lot.id,
+      page: 'letter',
+      rows: 5,
+      start: 10,
+    }).expect(200);
     expect(headers['content-type']).toContain('application/pdf');
     const text = (body as Buffer).toString('latin1');
     expect(text.startsWith('%PDF')).toBe(true);

@@ -1,6 +1,6 @@
-import type { printLabels} from '@hidewright/contract';
+import type { printLabels } from '@hidewright/contract';
 import { labelSheet, type QueryInputOf } from '@hidewright/contract';
-import type { labelPages} from '@hidewright/domain';
+import type { labelPages } from '@hidewright/domain';
 import { labelSpots, DomainError } from '@hidewright/domain';
 
 /** The measures of a sheet, as they were typed. */
