@@ -94,6 +94,14 @@ test('a maker counts bins blind on a phone, and the owner approves', async () =>
   await visit(page, `${hidewright.url}/stockroom/hardware/${first.hardwareId}`);
   await page.getByText('counted: All hardware').waitFor();
 
+  await page.goto(`${hidewright.url}/stockroom/tags?hardware=${first.hardwareId}`);
+  await settled(page);
+  const [tags] = await Promise.all([
+    page.waitForEvent('download'),
+    page.getByRole('link', { name: 'Get the PDF' }).click(),
+  ]);
+  expect(tags.suggestedFilename()).toMatch(/^tags-.*\.pdf$/);
+
   // Being out of reach and an unknown tag are what this walk provokes; nothing else.
   const expected = /ERR_INTERNET_DISCONNECTED|status of 404/;
   expect(complaints.filter((said) => !expected.test(said))).toEqual([]);

@@ -85,7 +85,7 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
               onDone();
             }}
           >
-            Hangs there uncut
+            Hangs uncut
           </Button>
         )}
       </div>
