@@ -1,6 +1,6 @@
 import { Button } from '../../../components/button.tsx';
 
-export interface TagChoice {
+interface TagChoice {
   id: number;
   label: string;
   detail: string;
