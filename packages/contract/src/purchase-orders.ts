@@ -106,6 +106,8 @@ export const purchaseOrder = z
     createdAt: z.string(),
     sentAt: z.string().nullable(),
     expectedOn: z.string().nullable(),
+    /** The day on which the next of what is still to come is awaited; null where nothing is. */
+    awaitedOn: z.string().nullable(),
     note: z.string(),
     lines: z.array(purchaseLine),
     /** How many deliveries of it have come. */

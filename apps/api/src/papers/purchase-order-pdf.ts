@@ -66,7 +66,7 @@ function drawFacts(paper: Paper, order: PurchaseOrderPaper): number {
     ...(order.expectedOn === null
       ? []
       : [['wanted by', printedDay(order.expectedOn)] as [string, string]]),
-    ['send it to', [order.shopName, order.shopAddress].filter(Boolean).join('\n')],
+    ['send it to', addressOf(order)],
   ];
   let y = 152;
   for (const [label, value] of facts) {
@@ -83,6 +83,10 @@ function drawFacts(paper: Paper, order: PurchaseOrderPaper): number {
   }
   return y;
 }
+
+/** Many an address begins with the shop's name already. */
+const addressOf = ({ shopName, shopAddress }: PurchaseOrderPaper): string =>
+  shopAddress.startsWith(shopName) ? shopAddress : [shopName, shopAddress].join('\n');
 
 /** The order's number to be scanned, for the slip that comes with the goods. */
 function drawCode(paper: Paper, { number }: PurchaseOrderPaper): number {

@@ -24,7 +24,9 @@ export function purchaseOrderLetter(
       : `We count on it by ${order.expectedOn}. Please tell us if it will be later.`,
     order.note,
     'The order is attached. Please put its sheet, or its number, in with the goods.',
-    [from.name, from.address].filter(Boolean).join('\n'),
+    from.address.startsWith(from.name)
+      ? from.address
+      : [from.name, from.address].filter(Boolean).join('\n'),
   ];
   return {
     subject: `Order ${order.number} from ${from.name}`,

@@ -80,6 +80,7 @@ function toReply(
     createdAt: order.createdAt,
     sentAt: order.sentAt,
     expectedOn: order.expectedOn,
+    awaitedOn: awaitedOn(order, lines),
     note: order.note,
     lines: lines.map((line) => toLine(line, order, known)),
     receipts: order.receipts,
@@ -116,6 +117,14 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
     amount: moneyText(lineAmount(line)),
     ...paidOf(paid, line),
   };
+}
+
+function awaitedOn(order: PurchaseOrder, lines: PurchaseLine[]): string | null {
+  if (order.state !== 'sent' && order.state !== 'part received') return null;
+  const days = lines
+    .filter(({ received, quantity }) => received < quantity)
+    .flatMap((line) => line.expectedOn ?? order.expectedOn ?? []);
+  return days.sort()[0] ?? null;
 }
 
 /** A draft awaits all of itself; of a cancelled order nothing is missing. */

@@ -53,8 +53,14 @@ export function Component() {
           <p className="max-w-prose whitespace-pre-line">{order.note}</p>
         </Card>
       )}
-      {receipts.items.map((receipt) => (
-        <ReceiptCard key={receipt.id} order={order} receipt={receipt} isOwner={isOwner} />
+      {receipts.items.map((receipt, at) => (
+        <ReceiptCard
+          key={receipt.id}
+          order={order}
+          receipt={receipt}
+          count={receipts.items.length - at}
+          isOwner={isOwner}
+        />
       ))}
       {role !== 'maker' && <ClaimsCard orderId={id} isOwner={isOwner} />}
       <ReturnsCard orderId={id} receipts={receipts.items} isOwner={isOwner} />

@@ -71,7 +71,7 @@ function Choosing() {
   const { data } = useSuspenseInfiniteQuery(purchaseOrdersQuery({ awaited: 'yes' }));
   const orders = data.pages.flatMap((page) => page.items);
   // Those without a day come last.
-  const day = (order: PurchaseOrder) => order.expectedOn ?? '9999-12-31';
+  const day = (order: PurchaseOrder) => order.awaitedOn ?? '9999-12-31';
   return <AwaitedOrders orders={[...orders].sort((a, b) => day(a).localeCompare(day(b)))} />;
 }
 

@@ -23,7 +23,7 @@ export function LineProgress({ line, order, today, onChangeDay }: LineProgressPr
   if (isNothing(toCome)) return 'all here';
   const late = expectedOn !== null && expectedOn < today;
   return (
-    <span>
+    <span className="block md:text-left">
       {goodsText(toCome, areaUnit)}
       {expectedOn !== null && (
         <span className={late ? 'block font-semibold text-oxblood' : 'block'}>

@@ -5,8 +5,7 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 /** The order's state, and whether it should have been here. */
 export function OrderState({ order }: { order: PurchaseOrder }) {
   const { today } = useWorkshop();
-  const awaited = order.state === 'sent' || order.state === 'part received';
-  const late = awaited && order.expectedOn !== null && order.expectedOn < today;
+  const late = order.awaitedOn !== null && order.awaitedOn < today;
   return (
     <span className="inline-flex flex-wrap gap-1.5">
       <StateMark state={order.state} />

@@ -51,7 +51,7 @@ function paidColumns(currency: string): Column<PurchaseLine>[] {
     },
     {
       id: 'difference',
-      header: 'Above the price',
+      header: `Price difference, ${currency}`,
       value: (row) => row.priceDifference,
       cell: (row) => <PriceDifference amount={row.priceDifference ?? '0'} />,
       align: 'right',

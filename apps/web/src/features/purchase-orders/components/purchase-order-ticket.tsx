@@ -12,7 +12,8 @@ interface PurchaseOrderTicketProps {
 
 export function PurchaseOrderTicket({ order, actions }: PurchaseOrderTicketProps) {
   const { currency, today, timeZone } = useWorkshop();
-  const { number, supplierName, sentAt, expectedOn, total } = order;
+  const { number, supplierName, sentAt, total } = order;
+  const expectedOn = order.awaitedOn ?? order.expectedOn;
   return (
     <Ticket
       level={1}

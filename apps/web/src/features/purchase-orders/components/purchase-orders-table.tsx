@@ -9,6 +9,8 @@ import { OrderState } from './order-state.tsx';
 
 const whatOf = (order: PurchaseOrder) => order.lines.map((line) => line.name).join(', ');
 
+const expectedOf = ({ awaitedOn, expectedOn }: PurchaseOrder) => awaitedOn ?? expectedOn;
+
 function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<PurchaseOrder>[] {
   const total: Column<PurchaseOrder> = {
     id: 'total',
@@ -36,8 +38,8 @@ function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<
     {
       id: 'expected',
       header: 'Expected',
-      value: (row) => row.expectedOn,
-      cell: (row) => row.expectedOn !== null && dayText(row.expectedOn, today),
+      value: expectedOf,
+      cell: (row) => expectedOf(row) && dayText(expectedOf(row) ?? '', today),
     },
     ...(withPrices ? [total] : []),
   ];

@@ -14,11 +14,13 @@ const sharedWords = { value: 'by value', area: 'by area', count: 'by count' };
 interface ReceiptCardProps {
   order: PurchaseOrder;
   receipt: Receipt;
+  /** Which delivery of the order it is, from 1. */
+  count: number;
   isOwner: boolean;
 }
 
 /** One delivery of an order: what came, what it cost to bring, and what is short of its mark. */
-export function ReceiptCard({ order, receipt, isOwner }: ReceiptCardProps) {
+export function ReceiptCard({ order, receipt, count, isOwner }: ReceiptCardProps) {
   const { today } = useWorkshop();
   const [asking, setAsking] = useState<'costs' | 'claim'>();
   const close = () => setAsking(undefined);
@@ -26,7 +28,7 @@ export function ReceiptCard({ order, receipt, isOwner }: ReceiptCardProps) {
   const { freight, duty } = receipt;
   return (
     <Card
-      title={`Came ${dayText(receipt.receivedOn, today)}`}
+      title={`Delivery ${count}, ${dayText(receipt.receivedOn, today)}`}
       subtitle={`received by ${receipt.byName}`}
       aside={
         isOwner &&
@@ -56,7 +58,7 @@ export function ReceiptCard({ order, receipt, isOwner }: ReceiptCardProps) {
           {percentText(receipt.tolerancePercent)} smaller than marked.
         </Notice>
       )}
-      <ReceiptLinesTable receipt={receipt} />
+      <ReceiptLinesTable receipt={receipt} label={`What came with delivery ${count}`} />
       {freight !== undefined && duty !== undefined && (
         <Carriage freight={freight} duty={duty} sharedBy={sharedWords[receipt.sharedBy]} />
       )}

@@ -3,7 +3,7 @@ import { useMemo } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, dayText, moneyText, percentText } from '../../../lib/formatting.ts';
+import { areaText, moneyText, percentText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { goodsText } from '../goods-text.ts';
@@ -12,10 +12,10 @@ function NameOf({ line }: { line: ReceiptLine }) {
   if (line.lotId === null)
     return <TextLink to={`/stockroom/hardware/${line.hardwareId}`}>{line.name}</TextLink>;
   return (
-    <>
+    <span className="block text-left">
       <TextLink to={`/stockroom/lots/${line.lotId}`}>{line.lotTag}</TextLink>
       <span className="block text-sm font-normal text-ink-soft">{line.name}</span>
-    </>
+    </span>
   );
 }
 
@@ -92,12 +92,12 @@ function columnsFor(workshop: Workshop, receipt: Receipt): Column<ReceiptLine>[]
   ];
 }
 
-export function ReceiptLinesTable({ receipt }: { receipt: Receipt }) {
+export function ReceiptLinesTable({ receipt, label }: { receipt: Receipt; label: string }) {
   const workshop = useWorkshop();
   const columns = useMemo(() => columnsFor(workshop, receipt), [workshop, receipt]);
   return (
     <DataTable
-      label={`What came ${dayText(receipt.receivedOn, workshop.today)}`}
+      label={label}
       rows={receipt.lines}
       rowId={(row) => row.id}
       columns={columns}

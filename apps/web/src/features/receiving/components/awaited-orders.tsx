@@ -28,7 +28,7 @@ export function AwaitedOrders({ orders }: { orders: readonly PurchaseOrder[] }) 
           onScan={(code) => scan.mutate(code)}
         />
       </Card>
-      <Card title="Awaited" subtitle="What comes first stands first">
+      <Card title="Awaited" subtitle="The earliest day first">
         {orders.length === 0 ? (
           <p>No order to a supplier is awaited.</p>
         ) : (
@@ -50,8 +50,8 @@ export function AwaitedOrders({ orders }: { orders: readonly PurchaseOrder[] }) 
 
 function AwaitedOrder({ order }: { order: PurchaseOrder }) {
   const { today } = useWorkshop();
-  const { expectedOn, number, supplierName, lines } = order;
-  const late = expectedOn !== null && expectedOn < today;
+  const { awaitedOn, number, supplierName, lines } = order;
+  const late = awaitedOn !== null && awaitedOn < today;
   return (
     <Link
       to={placeOf(order)}
@@ -59,9 +59,9 @@ function AwaitedOrder({ order }: { order: PurchaseOrder }) {
     >
       <span className="flex flex-wrap justify-between gap-x-4 font-semibold">
         <span>{`${number}, ${supplierName}`}</span>
-        {expectedOn !== null && (
+        {awaitedOn !== null && (
           <span className={late ? 'text-oxblood' : undefined}>
-            {late ? `late: ${dayText(expectedOn, today)}` : dayText(expectedOn, today)}
+            {late ? `late: ${dayText(awaitedOn, today)}` : dayText(awaitedOn, today)}
           </span>
         )}
       </span>

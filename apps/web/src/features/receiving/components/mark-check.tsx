@@ -20,8 +20,7 @@ export function MarkCheck({ lot, tolerancePercent }: { lot: string; tolerancePer
   if (short) {
     return (
       <Notice tone="attention" live className="sm:col-span-2" title="Short of its mark.">
-        It misses {by}. The shop lets pass {percentText(tolerancePercent)}: the owner can claim the
-        rest.
+        {`It misses ${by}, and the shop lets ${percentText(tolerancePercent)} pass. The owner can claim what is missing.`}
       </Notice>
     );
   }

@@ -26,6 +26,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
       isOpen(line) &&
       !fields.some((row) => row.purchaseLineId === line.id),
   );
+  if (lines.length > 0 && left.length + fields.length === 0) return null;
   return (
     <fieldset>
       <legend className="mb-3 text-lg font-semibold">Hardware and supplies</legend>

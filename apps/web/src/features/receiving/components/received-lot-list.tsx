@@ -33,6 +33,7 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
   const toCome = ({ toCome: { areaMm2 } }: PurchaseLine) =>
     areaMm2 === null ? '' : `${areaText(areaMm2, areaUnit)} to come`;
 
+  if (lines.length > 0 && open.length + fields.length === 0) return null;
   return (
     <fieldset>
       <legend className="mb-3 text-lg font-semibold">Leather</legend>

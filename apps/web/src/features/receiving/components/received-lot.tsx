@@ -61,14 +61,20 @@ export function ReceivedLot(props: ReceivedLotProps) {
             choices={leathers}
           />
         )}
-        <AreaField
-          name={`${lot}.markedAreaMm2`}
-          label="Marked area"
-          optional
-          whenEmpty="null"
-          help="As stamped on it: 24.75 or 24³."
-        />
-        <AreaField name={`${lot}.measuredAreaMm2`} label="Measured area" help="As measured here." />
+        <div className="grid grid-cols-2 gap-x-4 sm:col-span-2">
+          <AreaField
+            name={`${lot}.markedAreaMm2`}
+            label="Marked area"
+            optional
+            whenEmpty="null"
+            help="As stamped on it: 24.75 or 24³."
+          />
+          <AreaField
+            name={`${lot}.measuredAreaMm2`}
+            label="Measured area"
+            help="As measured here."
+          />
+        </div>
         <MarkCheck lot={lot} tolerancePercent={tolerancePercent} />
         <SelectField name={`${lot}.form`} label="Form" choices={forms} />
         {cutToSize.includes(form) && (
