@@ -184,6 +184,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner', 'maker'],
   },
   {
+    name: 'receive-order',
+    list: '/purchase-orders?awaited=yes',
+    page: (id) => `/stockroom/receive?order=${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
     name: 'invoice',
     list: '/invoices',
     page: (id) => `/books/invoices/${id}`,

@@ -22,7 +22,7 @@ interface Priced {
 }
 
 /** A line of a delivery: what came, at what it costs. */
-export type PricedLine = Priced &
+type PricedLine = Priced &
   ({ of: 'lot'; typed: ReceivedLot; leather: Leather } | { of: 'hardware'; hardware: Hardware });
 /** With its share of freight and duty. */
 export type LandedLine = PricedLine & { carriage: Decimal };
