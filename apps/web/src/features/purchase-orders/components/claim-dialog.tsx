@@ -25,6 +25,8 @@ export function ClaimDialog({ order, receipt, onClose }: ClaimDialogProps) {
     queryKey: ['purchase-orders', order.id, 'claim-draft', receipt.id],
     queryFn: ({ signal }) => call(draftClaim, { params: { id: receipt.id }, signal }),
     gcTime: 0,
+    // Once it is claimed there is nothing left to draft.
+    enabled: open.isIdle || open.isError,
   });
   const mailable = draft !== undefined && draft.supplierEmail !== '';
   return (
