@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { confidential } from './confidential.ts';
 import { choice, id, lengthBetween, optionalLine, positiveCount } from './fields.ts';
 
 /** What one of it is. All are counted whole. */
@@ -74,7 +75,7 @@ export const hardwareDetailsKept = {
   colour: z.string(),
   bin: z.string(),
   fromCustomer: z.boolean(),
-  priceFromParts: z.boolean(),
+  priceFromParts: confidential(z.boolean()),
   parts: z.array(z.object({ hardwareId: id, name: z.string(), quantity: z.int(), free: z.int() })),
   /** The kits that it is part of: it may not be a kit itself. */
   partOf: z.array(z.object({ hardwareId: id, name: z.string() })),

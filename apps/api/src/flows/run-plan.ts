@@ -58,7 +58,12 @@ export async function planRun(
   const version = await em.findOneOrFail(PatternVersion, quote.patternVersionId);
   const { patternId } = version;
   const input = forOne(quote, quantity, option);
-  return planOf(em, input, { definition: definitionOf(version), patternId, quantity, option: null });
+  return planOf(em, input, {
+    definition: definitionOf(version),
+    patternId,
+    quantity,
+    option: null,
+  });
 }
 
 interface Planned {

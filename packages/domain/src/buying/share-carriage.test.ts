@@ -41,9 +41,8 @@ describe('freight and duty', () => {
         (amount, lines, by) => {
           const bears = lines.some(
             (line) =>
-              Number(
-                by === 'value' ? line.goods : by === 'area' ? line.areaMm2 : line.quantity,
-              ) > 0,
+              Number(by === 'value' ? line.goods : by === 'area' ? line.areaMm2 : line.quantity) >
+              0,
           );
           fc.pre(bears || amount === '0.00');
           const parts = shareCarriage(amount, lines, by);

@@ -153,7 +153,12 @@ async function planPattern(
     customerId: null,
     option,
     by: day,
-    plan: await planOf(work.em, input, { definition, patternId: laid.patternId, quantity: pieces, option }),
+    plan: await planOf(work.em, input, {
+      definition,
+      patternId: laid.patternId,
+      quantity: pieces,
+      option,
+    }),
     definition,
     sides: sidesOf(worked.layout.container),
   };

@@ -236,14 +236,14 @@ describe('taking', () => {
     const receipt = await as('owner')
       .post('/api/receipts')
       .send({
-        lots: [{ leatherId: bridle.body.id, tag: 'B-1', form: 'side', measuredAreaMm2: '900000' }],
+        lots: [{ leatherId: bridle.body.id, tag: 'BR-1', form: 'side', measuredAreaMm2: '900000' }],
       })
       .expect(201);
     const other = await post('takings', { lotId: receipt.body.lots[0].id, areaMm2: '5' }).expect(
       422,
     );
     expect(other.body.detail).toBe(
-      'Lot B-1 is another leather; J-0001 needs Oak tan 5–6 oz. Choose a lot of that.',
+      'Lot BR-1 is another leather; J-0001 needs Oak tan 5–6 oz. Choose a lot of that.',
     );
   });
 });

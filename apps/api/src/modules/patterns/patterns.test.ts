@@ -42,7 +42,9 @@ describe('a pattern', () => {
       leatherName: 'Oak tan 5–6 oz',
       description: 'round, 95 mm',
     });
-    expect(pattern.hardware).toEqual([{ hardwareId, perPiece: 2, name: 'Rivet 9 mm' }]);
+    expect(pattern.hardware).toEqual([
+      { hardwareId, perPiece: 2, name: 'Rivet 9 mm', remarks: [] },
+    ]);
     expect(pattern.layout.pieces).toBeGreaterThan(0);
     expect(pattern.outlinePath).toMatch(/^M /);
     const read = await shop.as('maker').get(`/api/patterns/${pattern.id}`).expect(200);

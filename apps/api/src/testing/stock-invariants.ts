@@ -1,0 +1,89 @@
+import type { EntityManager } from '@mikro-orm/sqlite';
+
+/** The state of every order, job and sheet, and how far the books and the log have come. */
+export interface StockStand {
+  states: Map<string, string>;
+  lastDeed: number;
+  lastMovement: number;
+  held: number;
+}
+
+const stateful = [
+  ['purchase order', 'purchase_order'],
+  ['job', 'job'],
+  ['order', 'customer_order'],
+  ['count', 'stock_count'],
+] as const;
+
+export async function readStand(em: EntityManager): Promise<StockStand> {
+  const states = new Map<string, string>();
+  for (const [kind, table] of stateful) {
+    const rows = await em.execute<{ id: number; state: string }[]>(
+      `SELECT id, state FROM ${table}`,
+    );
+    for (const { id, state } of rows) states.set(`${kind} ${id}`, state);
+  }
+  const [row] = await em.execute<[Omit<StockStand, 'states'>]>(
+    `SELECT (SELECT COALESCE(MAX(seq), 0) FROM activity) AS lastDeed,
+       (SELECT COALESCE(MAX(id), 0) FROM stock_movement) AS lastMovement,
+       (SELECT COALESCE(SUM(reserved), 0) FROM stock_balance) AS held`,
+  );
+  return { states, ...row };
+}
+
+/** What does not hold in the stockroom's tables, each as a sentence: [I1], [I2] and [I9]. */
+export async function faultsOf(em: EntityManager, broken: ReadonlySet<string>): Promise<string[]> {
+  const faults: string[] = [];
+  const unequal = await em.execute<{ fault: string }[]>(
+    `SELECT 'I1: item ' || COALESCE(b.lot_id, b.hardware_id) || ' has ' || b.on_hand || ', moved ' || COALESCE(m.moved, 0) AS fault
+     FROM stock_balance b LEFT JOIN (SELECT lot_id, hardware_id, SUM(quantity) AS moved FROM stock_movement
+       GROUP BY lot_id, hardware_id) m ON m.lot_id IS b.lot_id AND m.hardware_id IS b.hardware_id
+     WHERE COALESCE(m.moved, 0) <> b.on_hand
+     UNION ALL
+     SELECT 'I1: item ' || COALESCE(b.lot_id, b.hardware_id) || ' has ' || b.reserved || ' held, jobs hold ' || COALESCE(r.held, 0)
+     FROM stock_balance b LEFT JOIN (SELECT lot_id, hardware_id, SUM(open) AS held FROM reservation
+       GROUP BY lot_id, hardware_id) r ON r.lot_id IS b.lot_id AND r.hardware_id IS b.hardware_id
+     WHERE COALESCE(r.held, 0) <> b.reserved`,
+  );
+  faults.push(...unequal.map(({ fault }) => fault));
+  const short = await em.execute<{ lot: number | null; hardware: number | null }[]>(
+    `SELECT lot_id AS lot, hardware_id AS hardware FROM stock_balance WHERE reserved > on_hand OR on_hand < 0`,
+  );
+  for (const { lot, hardware } of short) {
+    const item = lot === null ? `hardware ${hardware}` : `lot ${lot}`;
+    if (!broken.has(item))
+      faults.push(`I2: more of ${item} is held than there is, and no count said so`);
+  }
+  const astray = await em.execute<unknown[]>('PRAGMA foreign_key_check');
+  if (astray.length > 0) faults.push(`I9: ${JSON.stringify(astray)}`);
+  const [sound] = await em.execute<[{ integrity_check: string }]>('PRAGMA integrity_check');
+  if (sound.integrity_check !== 'ok') faults.push(`I9: ${sound.integrity_check}`);
+  return faults;
+}
+
+/** What lies on the way where one press does two things: a ticket that is finished at once was begun as well. */
+const onTheWay: Record<string, string> = {
+  'ready finished': 'at the bench',
+  'taken on packed': 'in work',
+};
+
+/** Changes of state without exactly one row of the log each, by whoever did it: [I8]. */
+export async function unloggedChanges(
+  em: EntityManager,
+  before: StockStand,
+  after: StockStand,
+  actorName: string,
+): Promise<string[]> {
+  const rows = await em.execute<{ subject: string; actor: string }[]>(
+    `SELECT subject_kind || ' ' || subject_id AS subject, actor_name AS actor FROM activity WHERE seq > ?`,
+    [before.lastDeed],
+  );
+  return [...after.states].flatMap(([thing, state]) => {
+    const from = before.states.get(thing);
+    if (from === state) return [];
+    const changes = onTheWay[`${from} ${state}`] === undefined ? 1 : 2;
+    const told = rows.filter(({ subject }) => subject === thing);
+    const rightly = told.length === changes && told.every(({ actor }) => actor === actorName);
+    return rightly ? [] : [`I8: ${thing} became ${state}, logged ${told.length} times`];
+  });
+}
