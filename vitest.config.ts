@@ -17,13 +17,13 @@ function whole(name: string, root: string, include: string): TestProjectInlineCo
 
 const longHang = { testTimeout: 300_000, hookTimeout: 600_000 };
 
-/** Browser walks, each on a copy of one demo. */
+/** Browser walks, each on a copy of one demo, two side by side; one that a busy machine tripped goes once more. */
 const walks: TestProjectInlineConfiguration = {
   test: {
     name: 'e2e',
     root: 'tests/e2e',
     include: ['**/*.e2e.ts'],
-    fileParallelism: false,
+    retry: 1,
     globalSetup: [path.resolve(import.meta.dirname, 'tests/support/made-demo.ts')],
     ...longHang,
   },

@@ -87,6 +87,7 @@ export type * from './costing/run-input.ts';
 export { hourlyKinds } from './costing/cost-lines.ts';
 export type { CostKind, CostLine } from './costing/cost-lines.ts';
 export type { RunCost } from './costing/cost-run.ts';
+export * from './costing/run-needs.ts';
 export type { Charge } from './pricing/charges.ts';
 export type * from './pricing/run-numbers.ts';
 export { priceRun } from './pricing/price-run.ts';

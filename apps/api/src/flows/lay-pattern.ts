@@ -2,8 +2,6 @@ import type { PatternDefinition } from '@hidewright/contract';
 import type { Context } from '../context.ts';
 import { invalid, type Problem } from '../http/problem.ts';
 import { layoutFor, requirePieces, type WorkedLayout } from '../modules/layouts/stored-layouts.ts';
-import { Pattern } from '../modules/patterns/pattern.entity.ts';
-import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 
 /** The version of a pattern that a quote is made with, and how its pieces lie. */
 export interface LaidPattern {
@@ -26,25 +24,22 @@ export async function layPattern(
   patternId: number,
   missing: Problem = choosePattern(),
 ): Promise<LaidPattern> {
-  const em = context.orm.em.fork();
-  const pattern = await em.findOne(Pattern, patternId);
-  if (pattern === null) throw missing;
-  const version = await em.findOneOrFail(PatternVersion, {
-    patternId,
-    number: pattern.latestVersion,
-  });
-  const definition = version.definition as PatternDefinition;
+  const [row] = await context.orm.em.fork().execute<[Row | undefined]>(latest, [patternId]);
+  if (row === undefined) throw missing;
+  const { definition: text, ...named } = row;
+  const definition = JSON.parse(text) as PatternDefinition;
   const worked = await layoutFor(context, definition);
   requirePieces(worked.layout);
-  return {
-    patternId,
-    patternName: pattern.name,
-    versionId: version.id,
-    versionNumber: version.number,
-    definition,
-    worked,
-  };
+  return { patternId, ...named, definition, worked };
 }
+
+type Row = Pick<LaidPattern, 'patternName' | 'versionId' | 'versionNumber'> & {
+  definition: string;
+};
+
+/** One row, since every quote and check begins with it. */
+const latest = `SELECT p.name AS patternName, v.id AS versionId, v.number AS versionNumber, v.definition
+  FROM pattern p JOIN pattern_version v ON v.pattern_id = p.id AND v.number = p.latest_version WHERE p.id = ?`;
 
 const choosePattern = () =>
   invalid([{ field: 'patternId', message: 'Choose a pattern from the list, or make a new one.' }]);

@@ -1,7 +1,7 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import {
   benchMinutes,
-  priceRun,
+  runNeeds,
   ticketSteps,
   toAtMost,
   waitAfter,
@@ -10,7 +10,7 @@ import {
 } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
-import { throughKits } from '../modules/hardware/kits.ts';
+import { summed, throughKits } from '../modules/hardware/kits.ts';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 import { definitionOf } from '../modules/patterns/pattern-versions.ts';
 import { numbersOfQuote, rungsOf } from '../modules/quotes/quote-numbers.ts';
@@ -58,12 +58,10 @@ export async function planRun(
   const version = await em.findOneOrFail(PatternVersion, quote.patternVersionId);
   const { patternId } = version;
   const input = forOne(quote, quantity, option);
-  return planOf(em, input, {
-    definition: definitionOf(version),
-    patternId,
-    quantity,
-    option: null,
-  });
+  const definition = definitionOf(version);
+  const plan = planOf(input, { definition, patternId, quantity, option: null });
+  // What a quote of before counts as one thing can be a kit by now.
+  return { ...plan, hardware: await throughKits(em, plan.hardware) };
 }
 
 interface Planned {
@@ -74,23 +72,19 @@ interface Planned {
 }
 
 /** The plan of a run with one quantity, with or without a quote. */
-export async function planOf(
-  em: EntityManager,
+export function planOf(
   asked: RunInput,
   { definition, patternId, quantity, option }: Planned,
-): Promise<RunPlan> {
+): RunPlan {
   const input = withOption(asked, option);
   const { leatherId, hardware, needsDie, needsPlate } = definition;
-  const [run] = priceRun(input).breaks;
-  if (run === undefined) throw new TypeError('One quantity has one rung');
+  const run = runNeeds(input, quantity);
   const { cutCount, containers, leatherAreaMm2 } = run;
   const steps = planSteps(input, { pieces: cutCount, containers });
   return {
     ...{ quantity, cutCount, containers, leatherAreaMm2, leatherId, needsDie, needsPlate },
     ...{ steps, input, patternId },
-    // What a quote of before counts as one thing can be a kit by now.
-    hardware: await throughKits(
-      em,
+    hardware: summed(
       input.hardware.map((line, at) => ({
         // Quotes of before there were options have the pattern's hardware, line by line.
         hardwareId: line.hardwareId ?? (hardware[at]?.hardwareId as number),

@@ -153,7 +153,7 @@ async function planPattern(
     customerId: null,
     option,
     by: day,
-    plan: await planOf(work.em, input, {
+    plan: planOf(input, {
       definition,
       patternId: laid.patternId,
       quantity: pieces,

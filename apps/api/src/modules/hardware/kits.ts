@@ -26,12 +26,22 @@ export async function throughKits(
     em,
     counted.map(({ hardwareId }) => hardwareId),
   );
+  return summed(
+    counted.flatMap(({ hardwareId, quantity }) => {
+      const parts = kits.get(hardwareId);
+      if (parts === undefined) return [{ hardwareId, quantity }];
+      return parts.map((part) => ({
+        hardwareId: part.hardwareId,
+        quantity: part.quantity * quantity,
+      }));
+    }),
+  );
+}
+
+/** Each kind once, with all that is counted of it. */
+export function summed(counted: readonly Counted[]): Counted[] {
   const sums = new Map<number, number>();
-  const add = (id: number, quantity: number) => sums.set(id, (sums.get(id) ?? 0) + quantity);
-  for (const { hardwareId, quantity } of counted) {
-    const parts = kits.get(hardwareId);
-    if (parts === undefined) add(hardwareId, quantity);
-    else for (const part of parts) add(part.hardwareId, part.quantity * quantity);
-  }
+  for (const { hardwareId, quantity } of counted)
+    sums.set(hardwareId, (sums.get(hardwareId) ?? 0) + quantity);
   return [...sums].map(([hardwareId, quantity]) => ({ hardwareId, quantity }));
 }
