@@ -94,6 +94,8 @@ const shortForRuns = z
     drafted: z.string(),
     drafts: z.array(paperNumber),
     supplierName: z.string().nullable(),
+    /** The customer brings it: it is not bought. */
+    fromCustomer: z.boolean(),
     /** When it is here if it is ordered today; null without a supplier. */
     arrivesOn: day.nullable(),
     days: z.array(comingDay),

@@ -66,7 +66,10 @@ export async function draftWhatIsShort(work: Work, { shop, runs }: CheckedRuns):
     const { pieces } = packsToBuy(item.packSize, lacking.missing);
     lines.push(await hardwareLine(work, item.hardwareId, pieces, lacking));
   }
-  return { orders: await draftEach(work, lines), notes: [...leathers, ...items].flatMap(notesOn) };
+  return {
+    orders: await draftEach(work, lines),
+    notes: [...[...leathers, ...items].flatMap(notesOn), ...customersBring(runs)],
+  };
 }
 
 type Standings = { run: CheckedRun; standing: Standing }[];
@@ -90,6 +93,14 @@ function lackingOf(name: string, buying: Sourcing, all: Standings): Lacking {
 }
 
 const isToBuy = ({ missing, buying }: Lacking): boolean => missing > 0 && buying.supplier !== null;
+
+/** What is the customer's is on no draft: they are asked for it. */
+function customersBring(runs: readonly CheckedRun[]): string[] {
+  const theirs = runs.flatMap(({ facts }) =>
+    facts.items.flatMap(({ item, short }) => (item.fromCustomer && short > 0 ? [item.name] : [])),
+  );
+  return [...new Set(theirs)].map((name) => `${name} comes from the customer: ask for it.`);
+}
 
 function notesOn({ name, buying, missing, drafted }: Lacking): string[] {
   const drafts = buying.drafts.join(' and ');

@@ -29,6 +29,8 @@ export interface Standing {
 
 export interface ItemFacts extends Standing {
   item: ItemStock;
+  /** what could be taken for the pieces that are short, and is offered for nothing else; nobody has decided it */
+  couldStandIn: { name: string; quantity: number }[];
 }
 
 interface Asked {
@@ -76,9 +78,10 @@ export function drawItem(
 ): { facts: ItemFacts; left: ItemStock } {
   const { pool, buying } = item;
   const { standing, left } = drawOrMend({ pool, buying, needed: quantity, day, today });
+  const bought = item.fromCustomer ? { ...standing, buy: 0, drafted: 0 } : standing;
   return {
-    facts: { ...standing, item },
-    left: { ...item, pool: left, buying: lessDrafted(buying, standing.drafted) },
+    facts: { ...bought, item, couldStandIn: [] },
+    left: { ...item, pool: left, buying: lessDrafted(buying, bought.drafted) },
   };
 }
 

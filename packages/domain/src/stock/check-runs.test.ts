@@ -198,6 +198,44 @@ describe('Can we make it?', () => {
     );
   });
 
+  it('says what can stand in for what is short, and decides nothing', () => {
+    const ring: ItemStock = { ...rivets(12), hardwareId: 8, name: 'Brass ring' };
+    const cap: ItemStock = { ...rivets(9), hardwareId: 9, name: 'Cap' };
+    const short = rivets(40, {
+      standIns: [
+        { name: 'Brass ring', parts: [{ hardwareId: 8, quantity: 1 }] },
+        { name: 'Capped set', parts: [{ hardwareId: 9, quantity: 2 }] },
+      ],
+    });
+    const stock = shop({ items: [short, ring, cap] });
+    const [few] = checkRuns(stock, [run(48)]);
+    expect(few).toMatchObject({ ok: false });
+    expect(hardwareWords(few!.items[0]!, say)).toMatch(
+      /8 short\..* 8 of Brass ring can stand in for the 8 that are short, if you choose so\.$/,
+    );
+    const [many] = checkRuns(stock, [run(60)]);
+    expect(hardwareWords(many!.items[0]!, say)).toMatch(
+      / 12 of Brass ring and 4 of Capped set can stand in for 16 of the 20 that are short, if you choose so\.$/,
+    );
+    expect(many!.items[0]).toMatchObject({ buy: 20 });
+  });
+
+  it('asks the customer for what is theirs, and buys none of it', () => {
+    const theirs = (free: number) =>
+      shop({ items: [rivets(free, { fromCustomer: true, buying: nobody })] });
+    const [short, enough] = [theirs(40), theirs(60)].map(
+      (stock) => checkRuns(stock, [run(60)])[0]!,
+    );
+    expect(short!.items[0]).toMatchObject({ short: 20, buy: 0 });
+    expect(short).toMatchObject({ ok: false, earliest: null });
+    expect(hardwareWords(short!.items[0]!, say)).toBe(
+      'Rivet, from the customer: 60 needed, 40 here, 20 missing. Ask the customer for them, and receive them here.',
+    );
+    expect(hardwareWords(enough!.items[0]!, say)).toBe(
+      'Rivet, from the customer: 60 of theirs are here.',
+    );
+  });
+
   it('refuses a run of a leather or hardware that is not there', () => {
     expect(() => checkRuns(shop({ items: [] }), [run(1)])).toThrow(
       expect.objectContaining({ field: 'hardware' }),
@@ -246,6 +284,36 @@ describe('over all runs', () => {
         expect(given).toBeLessThanOrEqual(
           free + comes.reduce((sum, { quantity }) => sum + quantity, 0),
         );
+      }),
+    );
+  });
+
+  it('a stand-in is never given out twice, nor what a run takes for itself', () => {
+    fc.assert(
+      fc.property(someRuns, fc.nat(200), fc.nat(200), (all, free, freeRings) => {
+        const part = [{ hardwareId: 8, quantity: 1 }];
+        const standIns = [{ name: 'Ring', parts: part }];
+        const ring: ItemStock = { ...rivets(freeRings), hardwareId: 8, name: 'Ring' };
+        const items = [rivets(free, { standIns }), ring, rivets(0, { hardwareId: 9, standIns })];
+        const runs = asRuns(all).map((each, at) => ({
+          ...each,
+          hardware: [7, 9, ...(at % 2 ? [8] : [])].map((hardwareId) => ({
+            hardwareId,
+            quantity: each.pieces,
+          })),
+        }));
+        const facts = checkRuns(shop({ items }), runs).flatMap((each) => each.items);
+        const offered = facts.flatMap(({ couldStandIn }) => couldStandIn);
+        const given = offered.reduce((sum, { quantity }) => sum + quantity, 0);
+        const taken = facts.reduce(
+          (sum, { item, now }) => (item.hardwareId === 8 ? sum + now : sum),
+          0,
+        );
+        expect(given + taken).toBeLessThanOrEqual(freeRings);
+        for (const { short, couldStandIn } of facts) {
+          const sum = couldStandIn.reduce((total, { quantity }) => total + quantity, 0);
+          expect(sum).toBeLessThanOrEqual(short);
+        }
       }),
     );
   });

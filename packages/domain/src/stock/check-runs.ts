@@ -6,6 +6,7 @@ import { InvalidInput } from '../errors/domain-error.ts';
 import { drawItem, type ItemFacts } from './check-items.ts';
 import { drawLeather, type LeatherFacts } from './check-leather.ts';
 import type { ItemStock, LeatherStock, RunNeeds, ShopStock } from './check-stock.ts';
+import { withStandIns } from './check-stand-ins.ts';
 import { drawTool, type ToolFacts } from './check-tools.ts';
 
 export interface HoursFacts {
@@ -53,7 +54,7 @@ export function checkRuns(shop: ShopStock, runs: readonly RunNeeds[]): RunFacts[
     facts[at] = checked.facts;
     left = checked.left;
   }
-  return facts;
+  return withStandIns(facts, left.items);
 }
 
 const byDay = (a: RunNeeds, b: RunNeeds): number => (a.by < b.by ? -1 : a.by > b.by ? 1 : 0);

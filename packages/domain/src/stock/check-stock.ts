@@ -19,12 +19,22 @@ export interface Sourcing {
   overdue?: readonly string[];
 }
 
+/** What may be taken in place of an item: itself, or of a kit the parts that one of it is made of. */
+export interface StandInStock {
+  name: string;
+  parts: readonly { hardwareId: number; quantity: number }[];
+}
+
 /** Hardware or supplies, in pieces. */
 export interface ItemStock {
   hardwareId: number;
   name: string;
   kind: 'hardware' | 'supplies';
   packSize: number;
+  /** the customer brings it: it is never bought */
+  fromCustomer?: boolean;
+  /** in the order in which they are offered; their parts are among the shop's items */
+  standIns?: readonly StandInStock[];
   pool: PromisePool;
   buying: Sourcing;
 }

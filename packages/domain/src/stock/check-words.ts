@@ -21,6 +21,7 @@ const mm2 = (thousandths: number): Decimal => new Exact(thousandths).div(1000);
 export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): string {
   const { needed, now, free, short } = standing;
   const pieces = (count: number) => countWords(count);
+  if (item.fromCustomer) return customerWords({ item, ...standing }, say);
   if (short === 0) {
     if (now === needed) return `${item.name}: take ${pieces(needed)} of ${pieces(free)} free.`;
     return `${item.name}: ${pieces(now)} of ${pieces(needed)} are free now. The rest ${comes(standing, say)}, in time.`;
@@ -31,7 +32,35 @@ export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): strin
     item.packSize <= 1
       ? `Buy ${pieces(missing)}, or receive them if they are here.`
       : `Buy ${packs(Math.ceil(missing / item.packSize), item.packSize)}, or receive them if they are here.`;
-  return [head, ...remedy(standing, item.buying, missing > 0 ? buy : null, say)].join(' ');
+  return [
+    head,
+    ...remedy(standing, item.buying, missing > 0 ? buy : null, say),
+    ...standInWords({ item, ...standing }),
+  ].join(' ');
+}
+
+/** Of what the customer brings, nothing is bought: they are asked for it. */
+function customerWords({ item, ...standing }: ItemFacts, say: Say): string {
+  const { needed, now, short } = standing;
+  const head = `${item.name}, from the customer:`;
+  if (short === 0) {
+    return now === needed
+      ? `${head} ${countWords(needed)} of theirs are here.`
+      : `${head} ${countWords(now)} of ${countWords(needed)} are here. The rest ${comes(standing, say)}, in time.`;
+  }
+  const missing = `${head} ${countWords(needed)} needed, ${countWords(now)} here, ${countWords(short)} missing.`;
+  const ask = `Ask the customer for ${short === 1 ? 'it' : 'them'}, and receive ${short === 1 ? 'it' : 'them'} here.`;
+  return [missing, ask, ...standInWords({ item, ...standing })].join(' ');
+}
+
+/** "12 Brass ring 16 mm can stand in for 12 of the 20 that are short." */
+function standInWords({ couldStandIn, short }: ItemFacts): string[] {
+  if (couldStandIn.length === 0) return [];
+  const total = couldStandIn.reduce((sum, { quantity }) => sum + quantity, 0);
+  const what = couldStandIn.map(({ name, quantity }) => `${countWords(quantity)} of ${name}`);
+  const all = short === 1 ? 'the 1 that is short' : `the ${countWords(short)} that are short`;
+  const forWhat = total < short ? `${countWords(total)} of ${all}` : all;
+  return [`${what.join(' and ')} can stand in for ${forWhat}, if you choose so.`];
 }
 
 const packs = (count: number, size: number): string =>

@@ -13,6 +13,7 @@ import { benchToday, openJobs } from '../bench-load.ts';
 import { toRackLot, type LotRow } from './leather-for-check.ts';
 import { buyingFrom, readOnOrder, type OnOrder, type Wanted } from './on-order.ts';
 import { readOwedToJobs, type OwedToJobs } from './owed-to-jobs.ts';
+import { readStandIns } from './stand-ins-for-check.ts';
 
 /** All that runs may be given, in as many questions to the database whatever lies on the rack; tools aside. */
 export async function loadShopStock(
@@ -22,13 +23,15 @@ export async function loadShopStock(
 ): Promise<Omit<ShopStock, 'tools'>> {
   const { em, today } = work;
   const leathers = await em.find(Leather, { id: { $in: [...wanted.leatherIds] } });
-  const kinds = await em.find(Hardware, { id: { $in: [...wanted.hardwareIds] } });
+  const standIns = await readStandIns(em, wanted.hardwareIds);
+  const hardwareIds = [...new Set([...wanted.hardwareIds, ...standIns.partIds])];
+  const kinds = await em.find(Hardware, { id: { $in: hardwareIds } });
   const suppliers = await em.find(Supplier, {
     id: { $in: [...leathers, ...kinds].flatMap(({ supplierId }) => supplierId ?? []) },
   });
-  const onOrder = await readOnOrder(em, today, wanted);
+  const onOrder = await readOnOrder(em, today, { ...wanted, hardwareIds });
   const owed = await readOwedToJobs(em);
-  const free = await freeHardware(work, wanted.hardwareIds);
+  const free = await freeHardware(work, hardwareIds);
   const sellerOf = ({ supplierId }: { supplierId: number | null }) =>
     suppliers.find(({ id }) => id === supplierId);
   return {
@@ -49,8 +52,14 @@ export async function loadShopStock(
       name: kind.name,
       kind: kind.kind,
       packSize: kind.packSize,
+      fromCustomer: kind.fromCustomer,
+      standIns: standIns.of(kind.id),
       ...poolOf(kind.id, free, owed, onOrder({ hardwareId: kind.id })),
-      buying: buyingFrom(sellerOf(kind), today, onOrder({ hardwareId: kind.id })),
+      buying: buyingFrom(
+        kind.fromCustomer ? undefined : sellerOf(kind),
+        today,
+        onOrder({ hardwareId: kind.id }),
+      ),
     })),
   };
 }

@@ -94,23 +94,29 @@ function leatherShort(leather: LeatherStock, around: Around): ShortForRuns {
   return describe(
     { of: 'leather', id: leather.leatherId, name: leather.name, unit: 'mm2' },
     { ...around, counted: { onHand: usable + reserved, reserved } },
-    { ...leather, text: (quantity) => unscaled(quantity, 3).toFixed() },
+    { ...leather, fromCustomer: false, text: (quantity) => unscaled(quantity, 3).toFixed() },
   );
 }
 
 const itemShort = (item: ItemStock, around: Around): ShortForRuns =>
   describe({ of: 'hardware', id: item.hardwareId, name: item.name, unit: 'piece' }, around, {
     ...item,
+    fromCustomer: item.fromCustomer ?? false,
     text: String,
   });
 
 function describe(
   head: Pick<ShortForRuns, 'of' | 'id' | 'name' | 'unit'>,
   around: Around,
-  stock: { pool: ItemStock['pool']; buying: Sourcing; text: (quantity: number) => string },
+  stock: {
+    pool: ItemStock['pool'];
+    buying: Sourcing;
+    fromCustomer: boolean;
+    text: (quantity: number) => string;
+  },
 ): ShortForRuns {
   const { asked, counted } = around;
-  const { pool, buying, text } = stock;
+  const { pool, buying, fromCustomer, text } = stock;
   const { days, runsOutOn } = weeksOf(pool.receipts, around);
   const sum = (part: 'needed' | 'buy' | 'drafted') =>
     text(asked.reduce((total, { standing }) => total + standing[part], 0));
@@ -124,6 +130,7 @@ function describe(
     drafted: sum('drafted'),
     drafts: [...buying.drafts],
     supplierName: buying.supplier,
+    fromCustomer,
     arrivesOn: buying.arrivesOn,
     days: days.map(({ day, comes, goes, left, what }) => ({
       ...{ day, what },

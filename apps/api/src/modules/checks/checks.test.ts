@@ -171,6 +171,42 @@ describe('Can we make them?', () => {
   });
 });
 
+describe('hardware that something else could do for, or the customer brings', () => {
+  const run = () => ({ patternId: ready.patternId, quantity: 200, by: '2026-12-21' });
+
+  it('says what can stand in, for one of the runs only', async () => {
+    const { hardwareId } = ready;
+    const brass = await as('owner')
+      .post('/api/hardware')
+      .send({ name: 'Rivet 9 mm, brass', unitPrice: '0.20' })
+      .expect(201);
+    const hardware = [{ hardwareId: brass.body.id, quantity: 12, cost: '2.40' }];
+    await as('owner').post('/api/receipts').send({ hardware }).expect(201);
+    const standIns = [{ hardwareId: brass.body.id, bothWays: false }];
+    await change(`hardware/${hardwareId}`, { standIns });
+    const found = await check([run(), run()]);
+    expect(rivetsOf(found, 0)).toMatchObject({ short: '100', enough: false });
+    expect(rivetsOf(found, 0)?.sentence).toMatch(
+      / 12 of Rivet 9 mm, brass can stand in for 12 of the 100 that are short, if you choose so\.$/,
+    );
+    expect(rivetsOf(found, 1)?.sentence).not.toContain('stand in');
+  });
+
+  it('asks for what the customer brings, and drafts none of it', async () => {
+    await nameSuppliers();
+    await change(`hardware/${ready.hardwareId}`, { fromCustomer: true });
+    const found = await check([run()]);
+    expect(rivetsOf(found, 0)?.sentence).toBe(
+      'Rivet 9 mm, from the customer: 400 needed, 300 here, 100 missing. Ask the customer for them, and receive them here.',
+    );
+    const short = found.short.find(({ of }) => of === 'hardware');
+    expect(short).toMatchObject({ fromCustomer: true, buy: '0', supplierName: null });
+    const { orders, notes } = await draft([run()]);
+    expect(orders.map(({ supplierName }) => supplierName)).toEqual(['Oldbeck Tannery']);
+    expect(notes).toEqual(['Rivet 9 mm comes from the customer: ask for it.']);
+  });
+});
+
 describe('drafting what is short', () => {
   it('drafts one order for each supplier in full packs, and nothing twice', async () => {
     await nameSuppliers();

@@ -25,12 +25,9 @@ export function ShortItem({ item }: { item: ShortForRuns }) {
           },
           { word: 'on order', figure: say(item.onOrder) },
           { word: 'needed for these', figure: say(item.needed) },
-          { word: 'to buy', figure: say(item.buy), note: draftedWords(item) },
-          {
-            word: 'ordered today, here by',
-            figure: item.arrivesOn === null ? 'not known' : dayText(item.arrivesOn, today),
-            note: item.supplierName ?? 'nobody is named who sells it',
-          },
+          ...(item.fromCustomer
+            ? [{ word: 'to buy', figure: 'none', note: 'from the customer' }]
+            : buying(item, { say, today })),
         ]}
       />
       <WeeksPicture item={item} say={say} />
@@ -40,6 +37,20 @@ export function ShortItem({ item }: { item: ShortForRuns }) {
       </details>
     </section>
   );
+}
+
+function buying(
+  item: ShortForRuns,
+  { say, today }: { say: (value: string) => string; today: string },
+) {
+  return [
+    { word: 'to buy', figure: say(item.buy), note: draftedWords(item) },
+    {
+      word: 'ordered today, here by',
+      figure: item.arrivesOn === null ? 'not known' : dayText(item.arrivesOn, today),
+      note: item.supplierName ?? 'nobody is named who sells it',
+    },
+  ];
 }
 
 function draftedWords({ drafted, drafts }: ShortForRuns): string | undefined {
