@@ -34,6 +34,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'leather', path: '/stockroom/leather' },
     { name: 'lots', path: '/stockroom/lots' },
     { name: 'hardware', path: '/stockroom/hardware' },
+    { name: 'finished-pieces', path: '/stockroom/finished' },
     { name: 'suppliers', path: '/stockroom/suppliers' },
     { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
     { name: 'purchase-order-new', path: '/stockroom/purchase-orders/new' },
@@ -57,6 +58,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'leather', path: '/stockroom/leather' },
     { name: 'lots', path: '/stockroom/lots' },
     { name: 'hardware', path: '/stockroom/hardware' },
+    { name: 'finished-pieces', path: '/stockroom/finished' },
     { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
     { name: 'receive', path: '/stockroom/receive' },
     { name: 'scan', path: '/stockroom/scan' },
@@ -169,6 +171,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     name: 'hardware-one',
     list: '/hardware',
     page: (id) => `/stockroom/hardware/${id}`,
+    roles: ['owner', 'maker'],
+  },
+  {
+    name: 'finished-piece',
+    list: '/finished-pieces',
+    page: (id) => `/stockroom/finished/${id}`,
     roles: ['owner', 'maker'],
   },
   {

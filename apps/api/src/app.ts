@@ -13,6 +13,7 @@ import { sameOrigin } from './http/same-origin.ts';
 import { sessions } from './http/session.ts';
 import { activityRoutes } from './modules/activity/activity.routes.ts';
 import { countRoutes } from './modules/counts/counts.routes.ts';
+import { finishedPieceRoutes } from './modules/finished-pieces/finished-pieces.routes.ts';
 import { checkRoutes } from './modules/checks/checks.routes.ts';
 import { customerRoutes } from './modules/customers/customers.routes.ts';
 import { designRoutes } from './modules/designs/designs.routes.ts';
@@ -90,6 +91,7 @@ const rooms: ((context: Context) => Router)[] = [
   stockRoutes,
   stockLevelRoutes,
   countRoutes,
+  finishedPieceRoutes,
   labelRoutes,
   invoiceRoutes,
   taxRateRoutes,

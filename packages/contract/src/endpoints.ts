@@ -6,6 +6,7 @@ import * as customers from './customers.ts';
 import * as cutAdvice from './cut-advice.ts';
 import * as designs from './designs.ts';
 import type { Endpoint } from './endpoint.ts';
+import * as finishedPieces from './finished-pieces.ts';
 import * as hardware from './hardware.ts';
 import * as invoices from './invoices.ts';
 import * as jobs from './jobs.ts';
@@ -86,6 +87,7 @@ const rooms: Record<string, unknown>[] = [
   supplierReturns,
   stock,
   stockLevels,
+  finishedPieces,
   counts,
   labels,
   invoices,

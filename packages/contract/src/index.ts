@@ -10,6 +10,7 @@ export * from './endpoint.ts';
 export * from './endpoints.ts';
 export * from './fields.ts';
 export * from './hardware-details.ts';
+export * from './finished-pieces.ts';
 export * from './hardware.ts';
 export * from './invoices.ts';
 export * from './job-ticket.ts';

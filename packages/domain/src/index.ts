@@ -111,6 +111,7 @@ export type { Dated, PromisePool } from './stock/promise-pool.ts';
 export * from './stock/order-quantity.ts';
 export * from './stock/production-lot.ts';
 export * from './stock/reorder-point.ts';
+export * from './stock/finished-cost.ts';
 export * from './stock/forecast.ts';
 export * from './stock/count-outcome.ts';
 export * from './stock/label-grid.ts';

@@ -5,6 +5,8 @@ import { StockCount } from '../modules/counts/stock-count.entity.ts';
 import { Customer } from '../modules/customers/customer.entity.ts';
 import { StoredFile } from '../modules/files/stored-file.entity.ts';
 import { Design } from '../modules/designs/design.entity.ts';
+import { FinishedMovement } from '../modules/finished-pieces/finished-movement.entity.ts';
+import { FinishedPiece } from '../modules/finished-pieces/finished-piece.entity.ts';
 import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { KitPart } from '../modules/hardware/kit-part.entity.ts';
 import { StandIn } from '../modules/hardware/stand-in.entity.ts';
@@ -60,6 +62,8 @@ export const entities = [
   Customer,
   CustomerLink,
   Design,
+  FinishedMovement,
+  FinishedPiece,
   Hardware,
   IdempotentReply,
   Impression,

@@ -63,6 +63,7 @@ describe('the schema', () => {
     'pattern_version',
     'period',
     'time_reading',
+    'finished_movement',
   ])('lets nobody change or delete a row of %s', async (table) => {
     const triggers = await query<{ name: string }>(
       `SELECT name FROM sqlite_master WHERE type = 'trigger' AND tbl_name = '${table}'`,

@@ -13,6 +13,7 @@ import { releaseReservations, returnStock } from '../modules/stock/stock-ledger.
 import { addImpressions } from '../modules/tools/tool-ledger.ts';
 import type { Work } from '../work.ts';
 import { chooseTool, strikesFor, toolsFor } from './choose-tools.ts';
+import { keepFinished } from './keep-finished.ts';
 import { startIfReady } from './start-job.ts';
 
 export interface Finished {
@@ -25,7 +26,7 @@ export interface Finished {
 
 /**
  * Closes a job: what is left goes back, what is still held is let go, die and plate gain their strikes, and the
- * order is packed.
+ * order is packed; pieces beyond it, and seconds, go on the shelf.
  * @throws {Problem} 404, 409 when the job is not at the bench or more would come back than was taken, 422
  */
 export async function finishJob(work: Work, jobId: number, finished: Finished): Promise<Job> {
@@ -39,6 +40,7 @@ export async function finishJob(work: Work, jobId: number, finished: Finished): 
   const order = await findOrder(work.em, job.orderId);
   await countStrikes(work, job, order, piecesRun(steps) || job.cutCount);
   await close(work, job, order, finished);
+  await keepFinished(work, job, order);
   return job;
 }
 

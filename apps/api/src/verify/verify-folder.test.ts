@@ -78,6 +78,11 @@ describe('verifying a data folder', () => {
       'log of who did what is whole',
     ],
     [
+      'what is on the shelf of finished pieces',
+      'UPDATE finished_piece SET on_hand = on_hand + 1',
+      'the sum of their ledger',
+    ],
+    [
       'what is on hand',
       'UPDATE stock_balance SET on_hand = on_hand + 1 WHERE id = 1',
       'sum of its movements',

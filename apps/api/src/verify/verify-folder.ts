@@ -7,6 +7,7 @@ import { fileRules } from './file-rules.ts';
 import { itemRules } from './item-rules.ts';
 import { quoteRules } from './quote-rules.ts';
 import type { Query } from './rule.ts';
+import { shelfRules } from './shelf-rules.ts';
 import { stockRules } from './stock-rules.ts';
 import { workRules } from './work-rules.ts';
 
@@ -23,6 +24,7 @@ const rules = [
   ...workRules,
   ...bookRules,
   ...itemRules,
+  ...shelfRules,
 ];
 
 /** Checks every rule on a read-only connection. */

@@ -2,6 +2,7 @@ import type { CheckAnswer } from '@hidewright/contract';
 import { checkRuns, type RunFacts, type ShopStock } from '@hidewright/domain';
 import type { Work } from '../../work.ts';
 import type { Tool } from '../../modules/tools/tool.entity.ts';
+import { finishedWords } from './finished-for-check.ts';
 import { freeLotRows } from './leather-for-check.ts';
 import { loadShopStock } from './load-shop-stock.ts';
 import { needsOf, toolsOf, toToolStock } from './needs-of-runs.ts';
@@ -12,6 +13,8 @@ export interface CheckedRun {
   planned: PlannedRun;
   facts: RunFacts;
   press: CheckAnswer | null;
+  /** What lies finished already, in words. */
+  finished: string[];
 }
 
 export interface CheckedRuns {
@@ -40,6 +43,7 @@ export async function checkPlanned(
     planned: run,
     facts: facts[at] as RunFacts,
     press: await pressForCheck(em, run, tools[at]?.tools ?? []),
+    finished: await finishedWords(em, run),
   }));
   return { shop, runs };
 }

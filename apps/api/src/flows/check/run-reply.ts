@@ -28,7 +28,7 @@ export async function sayFor(em: EntityManager): Promise<Say> {
 }
 
 /** Every question answered, with what to take or what mends it. */
-export function runReply({ planned, facts, press }: CheckedRun, say: Say): RunCheck {
+export function runReply({ planned, facts, press, finished }: CheckedRun, say: Say): RunCheck {
   const { plan, by } = planned;
   const answers = [
     leatherAnswer(facts.leather, say),
@@ -46,7 +46,7 @@ export function runReply({ planned, facts, press }: CheckedRun, say: Say): RunCh
     yes: answers.every(({ enough }) => enough),
     answers,
     lots: facts.leather.takes.map(toLot),
-    notes: notesOn(planned),
+    notes: [...finished, ...notesOn(planned)],
     earliestDay: facts.earliest,
   };
 }

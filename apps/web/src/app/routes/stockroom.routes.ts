@@ -1,6 +1,7 @@
 import type { RouteObject } from 'react-router-dom';
 
 const nameOf = (thing: unknown) => (thing as { name: string }).name;
+const finishedOf = (thing: unknown) => (thing as { patternName: string }).patternName;
 const tagOf = (lot: unknown) => (lot as { tag: string }).tag;
 const titleOf = (sheet: unknown) => (sheet as { title: string }).title;
 const numberOf = (order: unknown) => (order as { number: string }).number;
@@ -83,6 +84,18 @@ export const stockroomRoutes: RouteObject[] = [
             path: ':id',
             handle: { crumb: nameOf },
             lazy: () => import('./stockroom/hardware.tsx'),
+          },
+        ],
+      },
+      {
+        path: 'finished',
+        handle: { crumb: 'Finished pieces' },
+        children: [
+          { index: true, lazy: () => import('./stockroom/finished-list.tsx') },
+          {
+            path: ':id',
+            handle: { crumb: finishedOf },
+            lazy: () => import('./stockroom/finished.tsx'),
           },
         ],
       },

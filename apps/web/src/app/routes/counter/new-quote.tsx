@@ -6,6 +6,7 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { say } from '../../../components/toast.ts';
 import { AddCustomerForm } from '../../../features/customers/components/add-customer-form.tsx';
 import { customersQuery } from '../../../features/customers/customers.queries.ts';
+import { ShelfNote } from '../../../features/finished-pieces/components/shelf-note.tsx';
 import { QuoteForm, type TypedQuote } from '../../../features/quotes/components/quote-form.tsx';
 import { useCreateQuote } from '../../../features/quotes/quotes.mutations.ts';
 import { patternChoicesQuery, quoteQuery } from '../../../features/quotes/quotes.queries.ts';
@@ -41,6 +42,9 @@ export function Component() {
         customers={customerChoices(customers.items)}
         newCustomer={(onAdded) => <AddCustomerForm brief onAdded={({ id }) => onAdded(id)} />}
         patterns={patterns}
+        shelf={(patternId, customerId) => (
+          <ShelfNote patternId={patternId} customerId={customerId} />
+        )}
         draftKey="quote-new"
         submitWord="Save the draft"
         cancelTo="/counter/quotes"

@@ -4,6 +4,7 @@ const items: SectionLink[] = [
   { to: '/stockroom/leather', word: 'Leather' },
   { to: '/stockroom/lots', word: 'Lots' },
   { to: '/stockroom/hardware', word: 'Hardware and supplies' },
+  { to: '/stockroom/finished', word: 'Finished pieces' },
   { to: '/stockroom/suppliers', word: 'Suppliers' },
   { to: '/stockroom/purchase-orders', word: 'Purchase orders' },
   { to: '/stockroom/on-hand', word: 'On hand' },

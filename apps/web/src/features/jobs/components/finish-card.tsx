@@ -42,8 +42,16 @@ export function FinishCard({ job }: { job: Job }) {
         submitWord="Finish and pack"
         submitSize="bench"
       >
-        <NumberField name="good" label="Good pieces" help={`${job.quantity} are ordered.`} />
-        <NumberField name="seconds" label="Seconds" help="Good enough to sell for less." />
+        <NumberField
+          name="good"
+          label="Good pieces"
+          help={`${job.quantity} are ordered; more go on the shelf of finished pieces.`}
+        />
+        <NumberField
+          name="seconds"
+          label="Seconds"
+          help="Good enough to sell for less; they go on the shelf."
+        />
         {leather.map(({ lotId, tag }, at) => (
           <AreaField
             key={lotId}

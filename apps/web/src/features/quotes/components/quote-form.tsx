@@ -29,6 +29,8 @@ interface QuoteFormProps {
   /** A short form that adds a customer without leaving this page. */
   newCustomer: (onAdded: (id: number) => void) => ReactNode;
   patterns: readonly Choice[];
+  /** What lies finished already of the pattern that is chosen. */
+  shelf?: ((patternId: number, customerId: number | undefined) => ReactNode) | undefined;
   draftKey: string;
   submitWord: string;
   cancelTo: string;
@@ -62,7 +64,8 @@ function QuoteFields({
   customers,
   newCustomer,
   patterns,
-}: Pick<QuoteFormProps, 'customers' | 'newCustomer' | 'patterns'>) {
+  shelf,
+}: Pick<QuoteFormProps, 'customers' | 'newCustomer' | 'patterns' | 'shelf'>) {
   const { today } = useWorkshop();
   const { basis, preview } = usePreview();
   const numbers = preview && 'numbers' in preview ? preview.numbers : undefined;
@@ -72,7 +75,7 @@ function QuoteFields({
       <Card>
         <div className="space-y-5">
           <CustomerField choices={customers} newCustomer={newCustomer} />
-          <PatternField choices={patterns} />
+          <PatternField choices={patterns} shelf={shelf} />
           <TextField
             name="title"
             label="What the customer calls it"

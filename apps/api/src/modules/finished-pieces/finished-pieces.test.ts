@@ -1,0 +1,170 @@
+import type { FinishedMovement, FinishedPiece, Job, RunsCheck } from '@hidewright/contract';
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import {
+  agreedQuote,
+  readyForTheBench,
+  takenOn,
+  ticketOf,
+  type BenchShop,
+} from '../../testing/bench-shop.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let ready: BenchShop;
+let ticket: Job;
+
+beforeEach(async () => {
+  ready = await readyForTheBench(await startTestShop());
+  ticket = await ticketOf(ready, await takenOn(ready));
+});
+afterEach(() => ready.shop.close());
+
+type Role = 'owner' | 'maker' | 'bookkeeper';
+const as = (role: Role) => ready.shop.as(role);
+const post = (path: string, body: object, role: Role = 'maker') =>
+  as(role).post(`/api/${path}`).send(body);
+const shelf = async (role: Role = 'owner') =>
+  (await as(role).get('/api/finished-pieces').expect(200)).body.items as FinishedPiece[];
+const movements = async (id: number) =>
+  (await as('owner').get(`/api/finished-pieces/${id}/movements`).expect(200)).body
+    .items as FinishedMovement[];
+
+async function finish(good: number, seconds: number): Promise<void> {
+  const [lot] = ticket.lots;
+  await post(`jobs/${ticket.id}/takings`, {
+    lotId: ready.lotId,
+    areaMm2: lot?.heldAreaMm2,
+  }).expect(201);
+  await post(`jobs/${ticket.id}/takings`, { hardwareId: ready.hardwareId, quantity: 100 }).expect(
+    201,
+  );
+  await post(`jobs/${ticket.id}/finish`, { good, seconds }).expect(201);
+}
+
+const kind = async (sort: FinishedPiece['sort']) =>
+  (await shelf()).find((piece) => piece.sort === sort) as FinishedPiece;
+
+describe('a job that makes more than is ordered, or seconds', () => {
+  it('puts them on the shelf at their share of leather and hardware', async () => {
+    await finish(52, 1);
+    const pieces = await shelf();
+    expect(pieces.map(({ sort, onHand, patternName }) => [patternName, sort, onHand])).toEqual([
+      ['Round coaster', 'seconds', 1],
+      ['Round coaster', 'good', 2],
+    ]);
+    const { items } = (await as('owner').get(`/api/stock-movements?jobId=${ticket.id}`)).body;
+    const cost = (items as { value: string }[]).reduce((sum, { value }) => sum - Number(value), 0);
+    const value = pieces.reduce((sum, piece) => sum + Number(piece.value), 0);
+    expect(value).toBeCloseTo((cost * 3) / 53, 2);
+    const [made] = await movements(pieces[1]?.id ?? 0);
+    expect(made).toMatchObject({ kind: 'made', quantity: 2, jobNumber: ticket.number });
+    expect((await shelf('maker'))[0]).not.toHaveProperty('value');
+  });
+
+  it('puts nothing there when just enough came out', async () => {
+    await finish(50, 0);
+    expect(await shelf()).toEqual([]);
+  });
+
+  it('is said where the same pattern is checked again', async () => {
+    await finish(52, 1);
+    const { id, version } = await kind('good');
+    await as('maker')
+      .patch(`/api/finished-pieces/${id}`)
+      .set('If-Match', `"${version}"`)
+      .send({ place: 'tray 3' })
+      .expect(200);
+    const runs = [{ patternId: ready.patternId, quantity: 10 }];
+    const check = (await post('checks', { runs }).expect(200)).body as RunsCheck;
+    const said = (notes: string[] = []) => notes.filter((note) => note.includes('on the shelf'));
+    expect(await kind('good')).toMatchObject({ customerId: ready.customer.id });
+    const both = [
+      '2 finished ones are on the shelf, tray 3.',
+      '1 finished second is on the shelf.',
+    ];
+    // What carries a customer's mark is offered to that customer only.
+    expect(said(check.runs[0]?.notes)).toEqual([]);
+    const quote = await agreedQuote(ready, 50);
+    const asked = (await as('maker').get(`/api/quotes/${quote.id}/check`).expect(200)).body as {
+      notes: string[];
+    };
+    expect(said(asked.notes)).toEqual(both);
+  });
+});
+
+describe('pieces on the shelf', () => {
+  it('leave it sold, given or spoiled, each with a word, and the last takes the last cent', async () => {
+    await finish(53, 0);
+    const { id } = await kind('good');
+    const take = (body: object) => post(`finished-pieces/${id}/takings`, body);
+    const sold = await take({ as: 'sold', quantity: 1, reason: 'at the market' }).expect(201);
+    expect(sold.body).toMatchObject({ onHand: 2 });
+    await take({ as: 'given', quantity: 1, reason: 'sample for Tern Street' }).expect(201);
+    await take({ as: 'spoiled', quantity: 1, reason: 'fell into dye' }).expect(201);
+    expect(await kind('good')).toMatchObject({ onHand: 0, value: '0.00', valueEach: null });
+    const all = await movements(id);
+    expect(all.map((row) => [row.kind, row.quantity])).toEqual([
+      ['spoiled', -1],
+      ['given', -1],
+      ['sold', -1],
+      ['made', 3],
+    ]);
+    expect(all.reduce((sum, { value }) => sum + Math.round(Number(value) * 100), 0)).toBe(0);
+    const log = (await as('owner').get('/api/activities')).body.items as { action: string }[];
+    expect(log.map(({ action }) => action)).toContain('gave away 1 of Round coaster');
+  });
+
+  it('are counted, at what those beside them cost or the last did', async () => {
+    await finish(52, 0);
+    const { id, valueEach } = await kind('good');
+    const counted = (count: number) =>
+      post(`finished-pieces/${id}/counts`, { counted: count, reason: 'Counted on the shelf' });
+    expect((await counted(4).expect(201)).body).toMatchObject({ onHand: 4 });
+    await counted(0).expect(201);
+    await counted(1).expect(201);
+    expect((await kind('good')).value).toBe(valueEach);
+    const before = (await movements(id)).length;
+    await counted(1).expect(201);
+    expect(await movements(id)).toHaveLength(before);
+  });
+
+  it('are never fewer than none, and nonsense is refused', async () => {
+    await finish(52, 0);
+    const { id, version } = await kind('good');
+    const take = (quantity: number) =>
+      post(`finished-pieces/${id}/takings`, { as: 'sold', quantity, reason: 'at the market' });
+    const refused = await take(3).expect(409);
+    expect(refused.body.detail).toBe(
+      '2 of them are on the shelf, and 3 cannot be taken. Take fewer, or count the shelf first.',
+    );
+    expect(refused.body.allowed).toEqual(['take up to 2']);
+    await take(0).expect(422);
+    await take(-1).expect(422);
+    await post(`finished-pieces/${id}/takings`, { as: 'sold', quantity: 1, reason: ' ' }).expect(
+      422,
+    );
+    await post(`finished-pieces/${id}/counts`, { counted: -1, reason: 'x' }).expect(422);
+    await post('finished-pieces/999/takings', { as: 'sold', quantity: 1, reason: 'x' }).expect(404);
+    await post(
+      `finished-pieces/${id}/takings`,
+      { as: 'sold', quantity: 1, reason: 'x' },
+      'bookkeeper',
+    ).expect(403);
+    await as('maker')
+      .patch(`/api/finished-pieces/${id}`)
+      .set('If-Match', `"${version + 1}"`)
+      .send({ place: 'tray 3' })
+      .expect(412);
+    expect(await kind('good')).toMatchObject({ onHand: 2 });
+  });
+
+  it('are sold once, however many reach for the last', async () => {
+    await finish(51, 0);
+    const { id } = await kind('good');
+    const sale = { as: 'sold', quantity: 1, reason: 'at the market' };
+    const replies = await Promise.all(
+      Array.from({ length: 8 }, () => post(`finished-pieces/${id}/takings`, sale)),
+    );
+    expect(replies.map(({ status }) => status).sort()).toEqual([201, ...Array(7).fill(409)]);
+    expect(await kind('good')).toMatchObject({ onHand: 0 });
+  });
+});

@@ -1,0 +1,46 @@
+import {
+  listFinishedMovements,
+  listFinishedPieces,
+  readFinishedPiece,
+  type QueryInputOf,
+} from '@hidewright/contract';
+import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
+import { call } from '../../lib/api.ts';
+
+type Asked = Omit<QueryInputOf<typeof listFinishedPieces>, 'cursor' | 'limit'>;
+
+/** What lies finished on the shelf, kind by kind. */
+export function finishedPiecesQuery(asked: Asked = {}) {
+  return infiniteQueryOptions({
+    queryKey: ['finished-pieces', asked],
+    queryFn: ({ signal, pageParam }) =>
+      call(listFinishedPieces, {
+        query: { ...asked, limit: 100, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
+    initialPageParam: '',
+    getNextPageParam: (last) => last.next,
+  });
+}
+
+export function finishedPieceQuery(id: number) {
+  return queryOptions({
+    queryKey: ['finished-piece', id],
+    queryFn: ({ signal }) => call(readFinishedPiece, { params: { id }, signal }),
+  });
+}
+
+/** What came to the shelf and left it, newest first. */
+export function finishedMovementsQuery(id: number) {
+  return infiniteQueryOptions({
+    queryKey: ['finished-piece', id, 'movements'],
+    queryFn: ({ signal, pageParam }) =>
+      call(listFinishedMovements, {
+        params: { id },
+        query: { limit: 50, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
+    initialPageParam: '',
+    getNextPageParam: (last) => last.next,
+  });
+}

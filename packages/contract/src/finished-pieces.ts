@@ -1,0 +1,133 @@
+import { z } from 'zod';
+import { confidential } from './confidential.ts';
+import { endpoint } from './endpoint.ts';
+import {
+  count,
+  day,
+  id,
+  idParams,
+  line,
+  optionalLine,
+  page,
+  pageQuery,
+  positiveCount,
+  version,
+} from './fields.ts';
+
+/** What may become of a piece that leaves the shelf. */
+const waysOut = ['sold', 'given', 'spoiled'] as const;
+export type WayOut = (typeof waysOut)[number];
+
+/** Finished pieces of one pattern that lie on the shelf, good ones and seconds apart. */
+export const finishedPiece = z
+  .object({
+    id,
+    patternId: id,
+    patternName: z.string(),
+    /** Null for the piece as it is. */
+    option: z.string().nullable(),
+    sort: z.enum(['good', 'seconds']),
+    /** Whose mark is stamped on them; null where there is none, and anybody can have them. */
+    customerId: id.nullable(),
+    customerName: z.string().nullable(),
+    onHand: count,
+    place: z.string(),
+    /** What they cost to make: leather and hardware, no wages. */
+    value: confidential(z.string()),
+    valueEach: confidential(z.string().nullable()),
+    version,
+  })
+  .meta({ id: 'FinishedPiece' });
+export type FinishedPiece = z.infer<typeof finishedPiece>;
+
+export const finishedMovement = z
+  .object({
+    id,
+    at: z.string(),
+    day,
+    kind: z.enum(['made', ...waysOut, 'count']),
+    /** Signed: in is positive. */
+    quantity: z.int(),
+    value: confidential(z.string()),
+    jobId: id.nullable(),
+    jobNumber: z.string().nullable(),
+    reason: z.string(),
+    actorName: z.string(),
+  })
+  .meta({ id: 'FinishedMovement' });
+export type FinishedMovement = z.infer<typeof finishedMovement>;
+
+const readers = ['owner', 'maker', 'bookkeeper'] as const;
+const hands = ['owner', 'maker'] as const;
+
+export const listFinishedPieces = endpoint({
+  method: 'GET',
+  path: '/finished-pieces',
+  summary: 'Finished pieces and seconds on the shelf, newest first',
+  access: readers,
+  query: pageQuery.extend({
+    patternId: z.coerce.number().int().positive().optional(),
+    /** Only those of which there are any. */
+    there: z.enum(['yes', 'no']).optional(),
+  }),
+  reply: page(finishedPiece),
+});
+
+export const readFinishedPiece = endpoint({
+  method: 'GET',
+  path: '/finished-pieces/{id}',
+  summary: 'Finished pieces of one kind',
+  access: readers,
+  params: idParams,
+  reply: finishedPiece,
+});
+
+export const listFinishedMovements = endpoint({
+  method: 'GET',
+  path: '/finished-pieces/{id}/movements',
+  summary: 'What came to the shelf and left it, newest first',
+  access: readers,
+  params: idParams,
+  query: pageQuery.omit({ q: true }),
+  reply: page(finishedMovement),
+});
+
+export const takeFinished = endpoint({
+  method: 'POST',
+  path: '/finished-pieces/{id}/takings',
+  summary: 'Take pieces from the shelf: sold, given away or spoiled',
+  access: hands,
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    as: z.enum(waysOut, 'Choose what becomes of them.'),
+    quantity: positiveCount,
+    reason: line(200, 'Say to whom or why, in a few words.'),
+  }),
+  reply: finishedPiece,
+});
+
+export const countFinished = endpoint({
+  method: 'POST',
+  path: '/finished-pieces/{id}/counts',
+  summary: 'Set what is on the shelf to what was counted',
+  access: hands,
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    counted: count,
+    reason: line(200, 'Say why, in a few words, such as counted on the shelf.'),
+  }),
+  reply: finishedPiece,
+});
+
+export const changeFinishedPiece = endpoint({
+  method: 'PATCH',
+  path: '/finished-pieces/{id}',
+  summary: 'Say where the pieces lie',
+  access: hands,
+  edits: true,
+  params: idParams,
+  body: z.strictObject({ place: optionalLine(60) }),
+  reply: finishedPiece,
+});
