@@ -71,6 +71,25 @@ describe('layers of stock', () => {
     );
   });
 
+  it('are as they were once the last receipt is undone, whatever was there before', () => {
+    fc.assert(
+      fc.property(ledgers, fc.array(receipt, { minLength: 1, maxLength: 3 }), (ledger, came) => {
+        const undone = came.toReversed().map(({ quantity, value }) => ({
+          quantity: -quantity,
+          value: -value,
+          undoes: true,
+        }));
+        expect(stockLayers([...ledger, ...came, ...undone])).toEqual(stockLayers(ledger));
+      }),
+    );
+  });
+
+  it('keep the rest of a layer that a receipt was a part of', () => {
+    const merged = { quantity: 250, value: 900 };
+    const undone = { quantity: -100, value: -500, undoes: true };
+    expect(stockLayers([merged, undone])).toEqual([{ quantity: 150, value: 400 }]);
+  });
+
   it('are taken from the oldest on', () => {
     const layers = stockLayers([
       { quantity: 150, value: 315_000 },

@@ -13,18 +13,21 @@ export interface StockLayer {
 export interface ValuedMovement {
   quantity: number;
   value: number;
+  /** it takes back what came in last, such as a receipt that is written again at another cost */
+  undoes?: boolean;
 }
 
 /**
  * What is left of each receipt after movements in their order, the oldest first: what goes is taken from the oldest.
  * Each part is rounded to the hundredth half up and the rest of a layer is what remains of it, so that the layers and
  * what was taken from them always sum to what came in. Perpetual first in, first out; a count that finds more is a
- * layer of its own.
+ * layer of its own. What undoes a receipt takes it out of the newest, at what it came in for: nothing older is gone.
  */
 export function stockLayers(movements: readonly ValuedMovement[]): StockLayer[] {
   const layers: StockLayer[] = [];
-  for (const { quantity, value } of movements) {
+  for (const { quantity, value, undoes } of movements) {
     if (quantity > 0) layers.push({ quantity, value });
+    else if (undoes) undoNewest(layers, { quantity: -quantity, value: -value });
     else takeOldest(layers, -quantity);
   }
   return layers;
@@ -49,6 +52,20 @@ function takeOldest(layers: StockLayer[], quantity: number): number {
     left -= oldest.quantity;
   }
   return cost;
+}
+
+/** A receipt of before the layers began lies in one with all that was there then, and leaves the rest of it. */
+function undoNewest(layers: StockLayer[], undone: StockLayer): void {
+  let { quantity, value } = undone;
+  for (let newest = layers.pop(); newest; newest = layers.pop()) {
+    if (quantity < newest.quantity) {
+      layers.push({ quantity: newest.quantity - quantity, value: newest.value - value });
+      return;
+    }
+    quantity -= newest.quantity;
+    value -= newest.value;
+    if (quantity === 0) return;
+  }
 }
 
 const shareOf = ({ quantity, value }: StockLayer, part: number): number =>

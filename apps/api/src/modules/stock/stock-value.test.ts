@@ -5,7 +5,7 @@ import { writeBareJob } from '../../testing/bare-job.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { inTransaction, reading, theProgram, type Work } from '../../work.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
-import { adjustStock, receiveStock, returnStock, takeStock } from './stock-ledger.ts';
+import { adjustStock, receiveStock, returnStock, takeStock, undoReceipt } from './stock-ledger.ts';
 import { StockMovement } from './stock-movement.entity.ts';
 
 let shop: Awaited<ReturnType<typeof startTestShop>>;
@@ -77,6 +77,25 @@ describe('what stock is worth', () => {
     await valueBy('moving average');
     expect(await bookExample()).toEqual({ sold: '7252.94', left: '8902.06' });
   });
+
+  it.each([
+    ['first in first out', ['100.00', '500.00']],
+    ['moving average', ['300.00', '300.00']],
+  ] as const)(
+    'by %s, takes a delivery that cost something else out of the newest',
+    async (method, costs) => {
+      await valueBy(method);
+      const hardwareId = await newHardware();
+      await buy(hardwareId, 100, 1);
+      await buy(hardwareId, 100, 3);
+      const paid = { hardwareId, quantity: 100 };
+      await doing((work) => undoReceipt(work, { ...paid, value: new Decimal(300) }));
+      expect(await worth(hardwareId)).toBe('100.00');
+      await buy(hardwareId, 100, 5);
+      expect([await use(hardwareId, 100), await use(hardwareId, 100)]).toEqual(costs);
+      expect(await worth(hardwareId)).toBe('0.00');
+    },
+  );
 
   it('begins, once the other way is chosen, with what the ledger says is there', async () => {
     await valueBy('moving average');

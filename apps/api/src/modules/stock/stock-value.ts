@@ -86,14 +86,15 @@ async function layersOf(
   hardwareId: number | null,
   after: number,
 ): Promise<StockLayer[]> {
-  const rows = await em.execute<StockLayer[]>(
+  const rows = await em.execute<(StockLayer & { undoes: number })[]>(
     `SELECT * FROM (
-       SELECT 0 AS id, COALESCE(SUM(quantity), 0) AS quantity, COALESCE(SUM(value), 0) AS value
+       SELECT 0 AS id, COALESCE(SUM(quantity), 0) AS quantity, COALESCE(SUM(value), 0) AS value, 0 AS undoes
          FROM stock_movement WHERE hardware_id = ? AND id <= ?
        UNION ALL
-       SELECT id, quantity, value FROM stock_movement WHERE hardware_id = ? AND id > ?)
+       SELECT id, quantity, value, kind = 'receive' AND quantity < 0 FROM stock_movement
+         WHERE hardware_id = ? AND id > ?)
      WHERE quantity <> 0 ORDER BY id`,
     [hardwareId, after, hardwareId, after],
   );
-  return stockLayers(rows);
+  return stockLayers(rows.map((row) => ({ ...row, undoes: row.undoes === 1 })));
 }
