@@ -7,6 +7,8 @@ import { PlainField } from './plain-field.tsx';
 interface WeighCountProps {
   /** Takes the count over into whatever is being counted. */
   onCount: (count: number) => void;
+  /** Whose count it is, where several stand below each other. */
+  of?: string | undefined;
 }
 
 const blank = { sampleCount: '10', sampleGrams: '', allGrams: '', tareGrams: '0', step: '0.1' };
@@ -21,12 +23,15 @@ const fields: { name: keyof Typed; label: string; unit: string }[] = [
 ];
 
 /** Counting by weight: weigh ten, weigh all. It stands in a form and is none itself. */
-export function WeighCount({ onCount }: WeighCountProps) {
+export function WeighCount({ onCount, of }: WeighCountProps) {
   const [typed, setTyped] = useState<Typed>(blank);
   const found = read(typed);
   return (
     <details>
-      <summary className="min-h-11 rounded py-2.5 font-semibold">Count by weight</summary>
+      <summary className="min-h-11 rounded py-2.5 font-semibold">
+        Count by weight
+        {of !== undefined && <span className="sr-only">{`: ${of}`}</span>}
+      </summary>
       <div className="mt-2 grid grid-cols-2 gap-x-4 gap-y-3">
         {fields.map(({ name, ...labels }) => (
           <PlainField
@@ -42,7 +47,10 @@ export function WeighCount({ onCount }: WeighCountProps) {
         {'count' in found && (
           <>
             <p>{found.sentence}</p>
-            <Button onClick={() => onCount(found.count)}>{`Take ${countText(found.count)}`}</Button>
+            <Button
+              className="min-h-11"
+              onClick={() => onCount(found.count)}
+            >{`Take ${countText(found.count)}`}</Button>
           </>
         )}
       </div>

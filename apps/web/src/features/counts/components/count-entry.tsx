@@ -4,6 +4,7 @@ import { useId, useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { InputFrame, inputLook } from '../../../components/input-frame.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
+import { WeighCount } from '../../../components/weigh-count.tsx';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { figureOf, readEntry } from '../count-words.ts';
@@ -89,6 +90,16 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
           </Button>
         )}
       </div>
+      {!ofLot && (
+        <WeighCount
+          of={line.tag}
+          onCount={(count) => {
+            setTyped(undefined);
+            onEnter({ quantity: count });
+            onDone();
+          }}
+        />
+      )}
       {wrong !== undefined && (
         <p id={`${id}-wrong`} className="mt-1 text-sm font-semibold text-oxblood">
           {wrong}
