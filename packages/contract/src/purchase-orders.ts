@@ -213,3 +213,17 @@ export const changeAwaitedDay = endpoint({
   body: z.strictObject({ expectedOn: day }),
   reply: purchaseOrder,
 });
+
+export const closePurchaseLine = endpoint({
+  method: 'POST',
+  path: '/purchase-orders/{id}/lines/{lineId}/closings',
+  summary: 'Say that nothing more of a line is to come: what is missing of it is short',
+  access: ['owner'],
+  creates: true,
+  params: z.strictObject({
+    id: z.coerce.number().int().positive(),
+    lineId: z.coerce.number().int().positive(),
+  }),
+  body: z.strictObject({ reason: line(200, 'Say why, in a few words.') }),
+  reply: purchaseOrder,
+});

@@ -34,9 +34,10 @@ const tables = [
   `CREATE INDEX finished_movement_piece ON finished_movement (finished_piece_id)`,
   `CREATE INDEX finished_movement_job ON finished_movement (job_id)`,
   ...appendOnly('finished_movement'),
+  `ALTER TABLE purchase_line ADD COLUMN closed INTEGER NOT NULL DEFAULT 0 CHECK (closed IN (0, 1))`,
 ];
 
-/** Finished pieces and seconds that stay in the shop, with a ledger of their own. */
+/** Finished pieces and seconds that stay in the shop, with a ledger of their own; and order lines of which nothing more comes. */
 export class TheShelf extends Migration {
   override up(): void {
     for (const statement of tables) this.addSql(statement);

@@ -29,7 +29,7 @@ const partsSql = `
   SELECT k.kit_id, k.hardware_id, h.name, k.quantity, h.unit_price,
     COALESCE(b.on_hand, 0) AS on_hand, COALESCE(MAX(0, b.on_hand - b.reserved), 0) AS free,
     COALESCE((SELECT SUM(l.quantity - l.received) FROM purchase_line l JOIN purchase_order p ON p.id = l.purchase_order_id
-      WHERE l.hardware_id = h.id AND l.received < l.quantity AND p.state IN ('sent', 'part received')), 0) AS on_order
+      WHERE l.hardware_id = h.id AND l.received < l.quantity AND l.closed = 0 AND p.state IN ('sent', 'part received')), 0) AS on_order
   FROM kit_part k JOIN hardware h ON h.id = k.hardware_id LEFT JOIN stock_balance b ON b.hardware_id = h.id
   WHERE k.kit_id IN (SELECT value FROM json_each(?)) ORDER BY k.id`;
 

@@ -52,7 +52,7 @@ const counted = `
     COALESCE(b.on_hand, 0) AS on_hand,
     COALESCE(b.reserved, 0) AS reserved,
     COALESCE((SELECT SUM(l.quantity - l.received) FROM purchase_line l JOIN purchase_order p ON p.id = l.purchase_order_id
-      WHERE l.hardware_id = h.id AND l.received < l.quantity AND p.state IN ('sent', 'part received')), 0) AS on_order,
+      WHERE l.hardware_id = h.id AND l.received < l.quantity AND l.closed = 0 AND p.state IN ('sent', 'part received')), 0) AS on_order,
     COALESCE((SELECT SUM(m.value) FROM stock_movement m WHERE m.hardware_id = h.id), 0) AS value
   FROM hardware h
   LEFT JOIN supplier s ON s.id = h.supplier_id

@@ -26,7 +26,7 @@ const areas = `
     COALESCE((SELECT SUM(MAX(0, b.on_hand - b.reserved)) FROM lot JOIN stock_balance b ON b.lot_id = lot.id
       WHERE lot.leather_id = leather.id), 0) AS free,
     COALESCE((SELECT SUM(l.quantity - l.received) FROM purchase_line l JOIN purchase_order p ON p.id = l.purchase_order_id
-      WHERE l.leather_id = leather.id AND l.received < l.quantity AND p.state IN ('sent', 'part received')), 0) AS on_order
+      WHERE l.leather_id = leather.id AND l.received < l.quantity AND l.closed = 0 AND p.state IN ('sent', 'part received')), 0) AS on_order
   FROM leather WHERE leather.id IN (SELECT value FROM json_each(?))`;
 
 /** Who sells each leather, and how much of it is on the rack and on its way. */

@@ -16,7 +16,7 @@ export async function awaitLineOn(
 ): Promise<void> {
   const line = await work.em.findOne(PurchaseLine, { id: lineId, purchaseOrderId: order.id });
   if (line === null) throw notFound('line');
-  const awaited = order.state === 'sent' || order.state === 'part received';
+  const awaited = (order.state === 'sent' || order.state === 'part received') && !line.closed;
   const { toCome } = lineProgress({ ordered: line.quantity, received: line.received }, awaited);
   if (toCome === 0) {
     throw wrongState(`Nothing more is awaited on line ${line.position} of ${order.number}.`);

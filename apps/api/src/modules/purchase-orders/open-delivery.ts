@@ -91,7 +91,7 @@ export class OpenDelivery {
     const from = order.state;
     if (this.#lines.every((line) => line.received === 0)) throw nothingCame(order);
     if (came) order.receipts += 1;
-    const complete = this.#lines.every((line) => line.received >= line.quantity);
+    const complete = this.#lines.every((line) => line.closed || line.received >= line.quantity);
     order.state = complete || nothingMore ? 'received' : 'part received';
     await this.#work.em.flush();
     await logDeed(this.#work, {

@@ -5,7 +5,7 @@ import { UnitPriceType } from '../../db/columns/columns.ts';
 /** What is ordered on one line: leather by area, or hardware by the piece. */
 @Entity({ tableName: 'purchase_line' })
 export class PurchaseLine {
-  [OptionalProps]?: 'received';
+  [OptionalProps]?: 'received' | 'closed';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -28,6 +28,10 @@ export class PurchaseLine {
 
   @Property({ type: 'integer', columnType: 'integer' })
   received = 0;
+
+  /** Nothing more of it is to come, although something is missing. */
+  @Property({ type: 'boolean', columnType: 'integer' })
+  closed = false;
 
   /** When the rest of it is awaited, where that is another day than the order's. */
   @Property({ type: 'text', columnType: 'text', nullable: true })

@@ -4,6 +4,7 @@ import {
   cancelPurchaseOrder as cancelEndpoint,
   changeAwaitedDay,
   changePurchaseOrder,
+  closePurchaseLine,
   listPurchaseOrders,
   purchaseOrderPaper,
   readPurchaseOrder,
@@ -21,6 +22,7 @@ import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve, serveFile } from '../../http/serve.ts';
 import { awaitLineOn } from './await-line-on.ts';
+import { closeLine } from './close-line.ts';
 import {
   cancelPurchaseOrder,
   changeDraft,
@@ -65,6 +67,12 @@ export function purchaseOrderRoutes(context: Context): Router {
     await requireVersion(work.em, { kind: 'purchase order', id, version }, ifMatch);
     await awaitLineOn(work, order, { lineId: params.lineId, expectedOn: body.expectedOn });
     return readOnePurchaseOrder(work.em, id);
+  });
+
+  serve(router, context, closePurchaseLine, async (work, { params, body }) => {
+    const order = await findPurchaseOrder(work, params.id);
+    await closeLine(work, order, { lineId: params.lineId, reason: body.reason });
+    return readOnePurchaseOrder(work.em, order.id);
   });
 
   serve(

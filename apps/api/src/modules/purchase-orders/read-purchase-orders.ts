@@ -122,13 +122,13 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
 function awaitedOn(order: PurchaseOrder, lines: PurchaseLine[]): string | null {
   if (order.state !== 'sent' && order.state !== 'part received') return null;
   const days = lines
-    .filter(({ received, quantity }) => received < quantity)
+    .filter(({ received, quantity, closed }) => received < quantity && !closed)
     .flatMap((line) => line.expectedOn ?? order.expectedOn ?? []);
   return days.sort()[0] ?? null;
 }
 
 /** A draft awaits all of itself; of a cancelled order nothing is missing. */
-function progressOf({ quantity, received }: PurchaseLine, { state }: PurchaseOrder) {
+function progressOf({ quantity, received, closed }: PurchaseLine, { state }: PurchaseOrder) {
   const ordered = state === 'cancelled' ? received : quantity;
-  return lineProgress({ ordered, received }, state !== 'received');
+  return lineProgress({ ordered, received }, state !== 'received' && !closed);
 }

@@ -212,6 +212,45 @@ describe('part deliveries', () => {
     await awaitOn('2026-12-22', closed.body.purchaseOrder.version).expect(409);
   });
 
+  it('leave one line closed short, and the order received once nothing is awaited', async () => {
+    const path = `/api/purchase-orders/${order.id}`;
+    const read = async () => (await shop.as('owner').get(path).expect(200)).body;
+    const [hides, rivetLine] = (await read()).lines as { id: number }[];
+    const close = (line: { id: number } | undefined, role: 'owner' | 'maker' = 'owner') =>
+      shop.as(role).post(`${path}/lines/${line?.id}/closings`).send({ reason: 'sold out' });
+    await close(hides, 'maker').expect(403);
+    const onOrder = async () =>
+      (await shop.as('owner').get(`/api/leathers/${things.leatherId}`)).body.onOrderAreaMm2;
+    expect(await onOrder()).not.toBe('0');
+    const one = await close(hides).expect(201);
+    expect(one.body).toMatchObject({ state: 'sent', lines: [{ toCome: { areaMm2: '0' } }, {}] });
+    expect(one.body.lines[0].short.areaMm2).toBe(one.body.lines[0].areaMm2);
+    expect(await onOrder()).toBe('0');
+    const again = await close(hides).expect(409);
+    expect(again.body.detail).toMatch(/^Nothing more is awaited on line 1/);
+    const none = await close(rivetLine).expect(409);
+    expect(none.body.detail).toMatch(/Cancel the order instead\.$/);
+    await receive({ hardware: [rivets(600)] }).expect(201);
+    expect(await read()).toMatchObject({ state: 'part received' });
+    const last = await close(rivetLine).expect(201);
+    expect(last.body).toMatchObject({
+      state: 'received',
+      awaitedOn: null,
+      lines: [{}, { toCome: { quantity: 0 }, short: { quantity: 400 } }],
+    });
+    const log = await shop.as('owner').get('/api/activities').expect(200);
+    expect(log.body.items[0].action).toMatch(/^closed line 2 of purchase order P-/);
+  });
+
+  it('need nothing of a line that is closed', async () => {
+    const path = `/api/purchase-orders/${order.id}`;
+    const { lines } = (await shop.as('owner').get(path).expect(200)).body;
+    const closing = { reason: 'sold out' };
+    await shop.as('owner').post(`${path}/lines/${lines[0].id}/closings`).send(closing).expect(201);
+    const came = await receive({ hardware: [rivets(1000)] }).expect(201);
+    expect(came.body.purchaseOrder).toMatchObject({ state: 'received' });
+  });
+
   it('are not put on the rack twice by two people', async () => {
     const body = { lots: [side()], hardware: [rivets(600)], receiptsSeen: 0 };
     const [one, two] = await Promise.all([receive(body, 'maker'), receive(body)]);

@@ -22,7 +22,7 @@ interface Row {
 
 const onOrder = (column: string, id: string) => `COALESCE((
   SELECT SUM(l.quantity - l.received) FROM purchase_line l JOIN purchase_order p ON p.id = l.purchase_order_id
-  WHERE l.${column} = ${id} AND l.received < l.quantity AND p.state IN ('sent', 'part received')), 0)`;
+  WHERE l.${column} = ${id} AND l.received < l.quantity AND l.closed = 0 AND p.state IN ('sent', 'part received')), 0)`;
 
 /** What open jobs need by their estimate, beyond what they hold and have taken. */
 const promisedHardware = `COALESCE((

@@ -88,7 +88,7 @@ export const sources: Source[] = [
     roles: ['owner', 'maker'],
     sql: `SELECT p.id, p.number, s.name AS title, s.name AS customer, p.state AS extra,
         (SELECT MIN(COALESCE(l.expected_on, p.expected_on)) FROM purchase_line l
-          WHERE l.purchase_order_id = p.id AND l.received < l.quantity) AS day
+          WHERE l.purchase_order_id = p.id AND l.received < l.quantity AND l.closed = 0) AS day
       FROM purchase_order p JOIN supplier s ON s.id = p.supplier_id
       WHERE p.state IN ('sent', 'part received') ORDER BY day LIMIT 4`,
     say: (row, today) => ({

@@ -5,6 +5,7 @@ import {
   changePurchaseOrder,
   changeReceipt,
   closeClaim,
+  closePurchaseLine,
   openClaim,
   returnToSupplier,
   sendPurchaseOrder,
@@ -20,6 +21,8 @@ export const useSendPurchaseOrder = () => useSend(sendPurchaseOrder);
 export const useCancelPurchaseOrder = () => useSend(cancelPurchaseOrder);
 
 export const useChangeAwaitedDay = () => useSend(changeAwaitedDay);
+
+export const useCloseLine = () => useSend(closePurchaseLine);
 
 export const useChangeReceipt = () => useSend(changeReceipt);
 

@@ -9,10 +9,11 @@ interface LineProgressProps {
   order: PurchaseOrder;
   today: string;
   onChangeDay: (() => void) | undefined;
+  onCloseLine: (() => void) | undefined;
 }
 
 /** What a line still lacks and by when, or what it ended over or short. */
-export function LineProgress({ line, order, today, onChangeDay }: LineProgressProps) {
+export function LineProgress({ line, order, today, onChangeDay, onCloseLine }: LineProgressProps) {
   const { areaUnit } = useWorkshop();
   const { toCome, over, short, expectedOn } = line;
   if (!isNothing(over)) return <strong>{`${goodsText(over, areaUnit)} over`}</strong>;
@@ -33,6 +34,11 @@ export function LineProgress({ line, order, today, onChangeDay }: LineProgressPr
       {onChangeDay && (
         <Button tone="quiet" className="-ml-3.5" onClick={onChangeDay}>
           Another day<span className="sr-only">{` for ${line.name}`}</span>
+        </Button>
+      )}
+      {onCloseLine && (
+        <Button tone="quiet" className="-ml-3.5" onClick={onCloseLine}>
+          Nothing more<span className="sr-only">{` of ${line.name}`}</span>
         </Button>
       )}
     </span>

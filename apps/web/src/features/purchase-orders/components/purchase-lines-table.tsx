@@ -9,6 +9,7 @@ import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { goodsText } from '../goods-text.ts';
 import { AwaitedDayDialog } from './awaited-day-dialog.tsx';
+import { CloseLineDialog } from './close-line-dialog.tsx';
 import { LineProgress } from './line-progress.tsx';
 
 const placeOf = (line: PurchaseLine) =>
@@ -70,10 +71,15 @@ function PriceDifference({ amount }: { amount: string }) {
   );
 }
 
+interface LineActs {
+  move: (line: PurchaseLine) => void;
+  close: (line: PurchaseLine) => void;
+}
+
 function columnsFor(
   { areaUnit, currency, today }: Workshop,
   order: PurchaseOrder,
-  onChangeDay: ((line: PurchaseLine) => void) | undefined,
+  acts: LineActs | undefined,
 ): Column<PurchaseLine>[] {
   return [
     {
@@ -107,7 +113,8 @@ function columnsFor(
           line={row}
           order={order}
           today={today}
-          onChangeDay={onChangeDay && (() => onChangeDay(row))}
+          onChangeDay={acts && (() => acts.move(row))}
+          onCloseLine={acts && (() => acts.close(row))}
         />
       ),
     },
@@ -124,8 +131,9 @@ interface PurchaseLinesTableProps {
 export function PurchaseLinesTable({ order, isOwner }: PurchaseLinesTableProps) {
   const workshop = useWorkshop();
   const [moving, setMoving] = useState<PurchaseLine>();
+  const [closing, setClosing] = useState<PurchaseLine>();
   const columns = useMemo(
-    () => columnsFor(workshop, order, isOwner ? setMoving : undefined),
+    () => columnsFor(workshop, order, isOwner ? { move: setMoving, close: setClosing } : undefined),
     [workshop, order, isOwner],
   );
   return (
@@ -139,6 +147,9 @@ export function PurchaseLinesTable({ order, isOwner }: PurchaseLinesTableProps) 
       />
       {moving && (
         <AwaitedDayDialog order={order} line={moving} onClose={() => setMoving(undefined)} />
+      )}
+      {closing && (
+        <CloseLineDialog order={order} line={closing} onClose={() => setClosing(undefined)} />
       )}
     </>
   );
