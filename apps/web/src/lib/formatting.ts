@@ -1,4 +1,4 @@
-import { formatFootage, priceFromFt2 } from '@hidewright/domain';
+import { priceFromFt2, rackFootage, type AreaHabit } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import {
   areaFigure,
@@ -58,21 +58,12 @@ export function areaText(areaMm2: string, unit: AreaUnit, places = 2): string {
   return `${grouped(areaFigure(areaMm2, unit, places))} ${areaUnits[unit].sign}`;
 }
 
-/** How the shop says areas. */
-interface AreaHabit {
-  areaUnit: AreaUnit;
-  areaShown: 'tenth' | 'quarter';
-}
-
-/**
- * An area on the rack as the shop says it: 24.8 ft² in tenths, 24³ ft² in quarters. Below one foot both would say too
- * little, and dm² and m² know neither habit.
- */
-export function rackAreaText(areaMm2: string, { areaUnit, areaShown }: AreaHabit): string {
-  if (areaUnit !== 'ft2' || new Decimal(areaMm2).abs().lt(areaUnits.ft2.mm2))
-    return areaText(areaMm2, areaUnit);
-  const figure = formatFootage(areaMm2, areaShown);
-  return `${grouped(figure.replace(/[¹²³]$/, ''))}${/[¹²³]$/.exec(figure)?.[0] ?? ''} ${areaUnits.ft2.sign}`;
+/** An area on the rack as the shop says it: 24.8 ft² in tenths, 24³ ft² in quarters. */
+export function rackAreaText(areaMm2: string, habit: AreaHabit): string {
+  const footage = rackFootage(areaMm2, habit);
+  if (footage === undefined) return areaText(areaMm2, habit.areaUnit);
+  const [, whole = '', raised = ''] = /^(.*?)([¹²³]?)$/.exec(footage) ?? [];
+  return `${grouped(whole)}${raised} ${areaUnits.ft2.sign}`;
 }
 
 /** The price of a ft² in the shop's unit, without it: 9.50, or 1.0226 for a dm². */

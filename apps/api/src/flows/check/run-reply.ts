@@ -17,14 +17,14 @@ import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { sayDay } from '../../modules/quotes/say-day.ts';
-import { sayArea } from '../../modules/stock/say-area.ts';
+import { sayRackArea } from '../../modules/stock/say-area.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { CheckedRun } from './checked-runs.ts';
 
 /** How this shop says areas and days. */
 export async function sayFor(em: EntityManager): Promise<Say> {
-  const { areaUnit } = await em.findOneOrFail(Workshop, 1);
-  return { area: (areaMm2) => sayArea(new Decimal(areaMm2.toString()), areaUnit), day: sayDay };
+  const habit = await em.findOneOrFail(Workshop, 1);
+  return { area: (areaMm2) => sayRackArea(new Decimal(areaMm2.toString()), habit), day: sayDay };
 }
 
 /** Every question answered, with what to take or what mends it. */

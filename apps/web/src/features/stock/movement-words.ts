@@ -1,6 +1,6 @@
 import type { MovementKind } from '@hidewright/contract';
-import { areaText, countText } from '../../lib/formatting.ts';
-import type { AreaUnit } from '../../lib/units.ts';
+import type { AreaHabit } from '@hidewright/domain';
+import { countText, rackAreaText } from '../../lib/formatting.ts';
 
 export const movementWords: Readonly<Record<MovementKind, string>> = {
   receive: 'received',
@@ -18,12 +18,12 @@ export interface Quantity {
 }
 
 /** 12.4 ft², or 600 */
-export function quantityText({ areaMm2, quantity }: Quantity, unit: AreaUnit): string {
-  return areaMm2 === null ? countText(quantity ?? 0) : areaText(areaMm2, unit);
+export function quantityText({ areaMm2, quantity }: Quantity, habit: AreaHabit): string {
+  return areaMm2 === null ? countText(quantity ?? 0) : rackAreaText(areaMm2, habit);
 }
 
 /** Like `quantityText`, with a plus where something came in. */
-export function signedText(moved: Quantity, unit: AreaUnit): string {
-  const text = quantityText(moved, unit);
+export function signedText(moved: Quantity, habit: AreaHabit): string {
+  const text = quantityText(moved, habit);
   return Number(moved.areaMm2 ?? moved.quantity) > 0 ? `+${text}` : text;
 }

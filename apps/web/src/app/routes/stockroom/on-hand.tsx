@@ -14,7 +14,7 @@ import {
 } from '../../../features/stock/components/levels-tables.tsx';
 import { levelsQuery } from '../../../features/stock/stock.queries.ts';
 import { addressOf } from '../../../lib/api.ts';
-import { areaText, moneyText } from '../../../lib/formatting.ts';
+import { rackAreaText, moneyText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { StockroomNav } from './stockroom-nav.tsx';
@@ -33,7 +33,8 @@ export function Component() {
   const [search, setSearch] = useSearchParams();
   const asked = wanted(search);
   const { data: levels } = useSuspenseQuery(levelsQuery(asked));
-  const { areaUnit, currency, today } = useWorkshop();
+  const workshop = useWorkshop();
+  const { currency, today } = workshop;
   const id = useId();
   const worth =
     levels.value === undefined
@@ -82,7 +83,7 @@ export function Component() {
           <KeyFigures
             large
             figures={[
-              { word: 'Leather', figure: areaText(levels.leatherAreaMm2, areaUnit, 1) },
+              { word: 'Leather', figure: rackAreaText(levels.leatherAreaMm2, workshop) },
               ...worth,
             ]}
           />

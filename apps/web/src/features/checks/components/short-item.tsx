@@ -1,14 +1,15 @@
 import type { ShortForRuns } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
-import { areaText, countText, dayText } from '../../../lib/formatting.ts';
+import { rackAreaText, countText, dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { WeeksPicture } from './weeks-picture.tsx';
 
 /** What is short of one thing, by when it can be here, and how it goes on: a picture, and the same as a table. */
 export function ShortItem({ item }: { item: ShortForRuns }) {
-  const { today, areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
+  const { today } = workshop;
   const say = (value: string) =>
-    item.unit === 'mm2' ? areaText(value, areaUnit, 1) : countText(Number(value));
+    item.unit === 'mm2' ? rackAreaText(value, workshop) : countText(Number(value));
   return (
     <section
       aria-label={item.name}

@@ -6,7 +6,7 @@ import { EmptyState } from '../../../components/empty-state.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { say } from '../../../components/toast.ts';
 import { ApiProblem } from '../../../lib/api-problem.ts';
-import { areaText, countText } from '../../../lib/formatting.ts';
+import { rackAreaText, countText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
 import { TakeOther } from './take-other.tsx';
@@ -18,7 +18,7 @@ interface StockCardProps {
 
 /** Leather and hardware of a job: what is held for it, what it has taken, and one press to take what is held. */
 export function StockCard({ job, canTake }: StockCardProps) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const { mutate, isPending, error: notTaken, variables } = useTakeForJob();
   const take = (body: Parameters<typeof mutate>[0]['body'], sentence: string) =>
     mutate({ params: { id: job.id }, body }, { onSuccess: () => say(sentence) });
@@ -34,7 +34,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
   return (
     <Card
       title="Leather and hardware"
-      subtitle={`${areaText(job.neededAreaMm2, areaUnit)} of ${job.leatherName} needed`}
+      subtitle={`${rackAreaText(job.neededAreaMm2, workshop)} of ${job.leatherName} needed`}
     >
       {error !== null && (
         <Notice tone="danger" live className="mb-4">
@@ -46,7 +46,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
           <Line
             key={lot.lotId}
             title={<LotTitle lot={lot} />}
-            detail={lotLine(lot, (mm2) => areaText(mm2, areaUnit))}
+            detail={lotLine(lot, (mm2) => rackAreaText(mm2, workshop))}
           >
             {job.state !== 'finished' && lot.heldAreaMm2 !== '0' && (
               <LetGo
@@ -64,7 +64,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
                   take({ lotId: lot.lotId, areaMm2: lot.heldAreaMm2 }, `Taken from lot ${lot.tag}.`)
                 }
               >
-                Take {areaText(lot.heldAreaMm2, areaUnit)}
+                Take {rackAreaText(lot.heldAreaMm2, workshop)}
               </Button>
             )}
           </Line>

@@ -8,7 +8,7 @@ import { Form } from '../../../components/form.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { say } from '../../../components/toast.ts';
-import { areaText } from '../../../lib/formatting.ts';
+import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useHoldForJob, useTakeForJob } from '../jobs.mutations.ts';
 
@@ -84,12 +84,12 @@ function useDeed({ job, deed, onDone }: MoveProps) {
 }
 
 function MoveLeather(props: MoveProps) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const send = useDeed(props);
   const { job, deed } = props;
   const choices = job.lots.map((lot) => ({
     value: lot.lotId,
-    label: `${lot.tag}: ${areaText(lot.freeAreaMm2, areaUnit)} free, ${areaText(lot.heldAreaMm2, areaUnit)} held`,
+    label: `${lot.tag}: ${rackAreaText(lot.freeAreaMm2, workshop)} free, ${rackAreaText(lot.heldAreaMm2, workshop)} held`,
   }));
   return (
     <Form

@@ -1,15 +1,16 @@
 import type { Lot } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, dayText, moneyText } from '../../../lib/formatting.ts';
+import { rackAreaText, dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 const given = (text: string) => (text === '' ? '–' : text);
 
 /** What is left of a lot, large; then where it lies and where it came from. */
 export function LotFacts({ lot }: { lot: Lot }) {
-  const { areaUnit, currency, today } = useWorkshop();
-  const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
+  const workshop = useWorkshop();
+  const { currency, today } = workshop;
+  const area = (areaMm2: string) => rackAreaText(areaMm2, workshop);
   const costs = [
     { word: `Cost, ${currency}`, figure: lot.cost },
     { word: `Left at cost, ${currency}`, figure: lot.valueOnHand },

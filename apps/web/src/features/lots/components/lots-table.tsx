@@ -4,15 +4,15 @@ import { useMemo, type ReactNode } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, dayText, moneyText } from '../../../lib/formatting.ts';
+import { rackAreaText, dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { formText } from '../lot-words.ts';
 
 const sumOf = (values: readonly string[]) => Decimal.sum(0, ...values).toFixed();
 
 function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
-  const { areaUnit, lengthUnit, currency, today } = workshop;
-  const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
+  const { lengthUnit, currency, today } = workshop;
+  const area = (areaMm2: string) => rackAreaText(areaMm2, workshop);
   const value: Column<Lot> = {
     id: 'value',
     header: `Left at cost, ${currency}`,

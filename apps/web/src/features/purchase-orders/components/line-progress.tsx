@@ -14,18 +14,18 @@ interface LineProgressProps {
 
 /** What a line still lacks and by when, or what it ended over or short. */
 export function LineProgress({ line, order, today, onChangeDay, onCloseLine }: LineProgressProps) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const { toCome, over, short, expectedOn } = line;
-  if (!isNothing(over)) return <strong>{`${goodsText(over, areaUnit)} over`}</strong>;
+  if (!isNothing(over)) return <strong>{`${goodsText(over, workshop)} over`}</strong>;
   if (!isNothing(short))
-    return <strong className="text-brass">{`${goodsText(short, areaUnit)} short`}</strong>;
+    return <strong className="text-brass">{`${goodsText(short, workshop)} short`}</strong>;
   const awaited = order.state === 'sent' || order.state === 'part received';
   if (!awaited) return '–';
   if (isNothing(toCome)) return 'all here';
   const late = expectedOn !== null && expectedOn < today;
   return (
     <span className="block md:text-left">
-      {goodsText(toCome, areaUnit)}
+      {goodsText(toCome, workshop)}
       {expectedOn !== null && (
         <span className={late ? 'block font-semibold text-oxblood' : 'block'}>
           {`${late ? 'late: ' : 'by '}${dayText(expectedOn, today)}`}

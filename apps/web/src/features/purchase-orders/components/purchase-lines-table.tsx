@@ -77,10 +77,11 @@ interface LineActs {
 }
 
 function columnsFor(
-  { areaUnit, currency, today }: Workshop,
+  workshop: Workshop,
   order: PurchaseOrder,
   acts: LineActs | undefined,
 ): Column<PurchaseLine>[] {
+  const { currency, today } = workshop;
   return [
     {
       id: 'name',
@@ -93,7 +94,7 @@ function columnsFor(
       id: 'ordered',
       header: 'Ordered',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => goodsText(row, areaUnit),
+      cell: (row) => goodsText(row, workshop),
       align: 'right',
     },
     {
@@ -101,7 +102,7 @@ function columnsFor(
       header: 'Received',
       value: (row) => row.receivedAreaMm2 ?? row.received,
       cell: ({ receivedAreaMm2, received }) =>
-        goodsText({ areaMm2: receivedAreaMm2, quantity: received }, areaUnit),
+        goodsText({ areaMm2: receivedAreaMm2, quantity: received }, workshop),
       align: 'right',
     },
     {

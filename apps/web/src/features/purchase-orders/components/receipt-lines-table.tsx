@@ -3,7 +3,7 @@ import { useMemo } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, moneyText, percentText } from '../../../lib/formatting.ts';
+import { rackAreaText, moneyText, percentText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { goodsText } from '../goods-text.ts';
@@ -31,7 +31,7 @@ function MarkedOf({
   const claimed = claimId === null ? '' : ', claimed';
   return (
     <>
-      {areaText(marked.areaMm2, workshop.areaUnit)}
+      {rackAreaText(marked.areaMm2, workshop)}
       <span className={marked.short ? 'block font-semibold text-brass' : 'block text-ink-soft'}>
         {marked.differenceMm2 === '0'
           ? 'as marked'
@@ -48,7 +48,7 @@ const usesOf = ({ lines }: Receipt) => ({
 });
 
 function columnsFor(workshop: Workshop, receipt: Receipt): Column<ReceiptLine>[] {
-  const { areaUnit, currency } = workshop;
+  const { currency } = workshop;
   const uses = usesOf(receipt);
   const marked: Column<ReceiptLine> = {
     id: 'marked',
@@ -83,7 +83,7 @@ function columnsFor(workshop: Workshop, receipt: Receipt): Column<ReceiptLine>[]
       id: 'came',
       header: 'Came',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => goodsText(row, areaUnit),
+      cell: (row) => goodsText(row, workshop),
       align: 'right',
     },
     ...(uses.marked ? [marked] : []),

@@ -8,7 +8,7 @@ import { NumberField } from '../../../components/number-field.tsx';
 import { SelectInput } from '../../../components/select-input.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { say } from '../../../components/toast.ts';
-import { areaText } from '../../../lib/formatting.ts';
+import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useReturnToSupplier } from '../purchase-orders.mutations.ts';
 
@@ -26,13 +26,13 @@ interface Choice {
 
 /** Everything that came, lots by their tag and hardware once. */
 function useChoices(receipts: readonly Receipt[]): Choice[] {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const choices = new Map<string, Choice>();
   for (const line of receipts.flatMap((receipt) => receipt.lines)) {
     const { lotId, lotTag, hardwareId, name, areaMm2 } = line;
     const key = lotId === null ? `hardware-${hardwareId}` : `lot-${lotId}`;
     const label =
-      lotId === null ? name : `${lotTag}, ${name}, ${areaText(areaMm2 ?? '0', areaUnit)}`;
+      lotId === null ? name : `${lotTag}, ${name}, ${rackAreaText(areaMm2 ?? '0', workshop)}`;
     const values =
       lotId === null
         ? ({ of: 'hardware', hardwareId: hardwareId ?? 0 } as const)

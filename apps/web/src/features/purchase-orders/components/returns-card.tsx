@@ -17,7 +17,7 @@ const less = (row: StockMovement) => ({
 });
 
 function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMovement>[] {
-  const { areaUnit, currency, timeZone } = workshop;
+  const { currency, timeZone } = workshop;
   const value: Column<StockMovement> = {
     id: 'value',
     header: `At cost, ${currency}`,
@@ -36,7 +36,7 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<StockMoveme
       id: 'quantity',
       header: 'How much',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => goodsText(less(row), areaUnit),
+      cell: (row) => goodsText(less(row), workshop),
       align: 'right',
     },
     ...(withValues ? [value] : []),

@@ -1,7 +1,7 @@
 import { compareArea } from '@hidewright/domain';
 import { useWatch } from 'react-hook-form';
 import { Notice } from '../../../components/notice.tsx';
-import { areaText, percentText } from '../../../lib/formatting.ts';
+import { rackAreaText, percentText } from '../../../lib/formatting.ts';
 import { isFigure } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
@@ -10,13 +10,13 @@ const isArea = (value: unknown): value is string =>
 
 /** How the measured area of a lot stands to the one marked on it, while both are typed. */
 export function MarkCheck({ lot, tolerancePercent }: { lot: string; tolerancePercent: string }) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const names = [`${lot}.markedAreaMm2`, `${lot}.measuredAreaMm2`];
   const [marked, measured] = useWatch({ name: names }) as unknown[];
   if (!isArea(marked) || !isArea(measured)) return null;
   const { differenceMm2, percent, short } = compareArea(marked, measured, tolerancePercent);
   const missing = differenceMm2.startsWith('-');
-  const by = `${areaText(differenceMm2.replace('-', ''), areaUnit)} (${percentText(percent.replace('-', ''))})`;
+  const by = `${rackAreaText(differenceMm2.replace('-', ''), workshop)} (${percentText(percent.replace('-', ''))})`;
   if (short) {
     return (
       <Notice tone="attention" live className="sm:col-span-2" title="Short of its mark.">

@@ -3,7 +3,7 @@ import { Plus } from 'lucide-react';
 import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
-import { areaText } from '../../../lib/formatting.ts';
+import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { blankLot, isOpen, nextLot, type TypedLot } from '../typed-delivery.ts';
 import { ReceivedLot } from './received-lot.tsx';
@@ -19,7 +19,7 @@ interface ReceivedLotListProps {
 export function ReceivedLotList(props: ReceivedLotListProps) {
   const { lines, leathers, tolerancePercent, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const open = lines.filter((line) => line.of === 'leather' && isOpen(line));
   const { getValues } = useFormContext<{ lots: TypedLot[] }>();
 
@@ -31,7 +31,7 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
   }
 
   const toCome = ({ toCome: { areaMm2 } }: PurchaseLine) =>
-    areaMm2 === null ? '' : `${areaText(areaMm2, areaUnit)} to come`;
+    areaMm2 === null ? '' : `${rackAreaText(areaMm2, workshop)} to come`;
 
   if (lines.length > 0 && open.length + fields.length === 0) return null;
   return (

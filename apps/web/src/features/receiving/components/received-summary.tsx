@@ -1,28 +1,28 @@
 import type { receiveDelivery, ReplyOf } from '@hidewright/contract';
+import type { AreaHabit } from '@hidewright/domain';
 import { Card } from '../../../components/card.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, countText } from '../../../lib/formatting.ts';
-import type { AreaUnit } from '../../../lib/units.ts';
+import { rackAreaText, countText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
-function overOf(received: ReplyOf<typeof receiveDelivery>, unit: AreaUnit): string[] {
+function overOf(received: ReplyOf<typeof receiveDelivery>, habit: AreaHabit): string[] {
   const lines = received.purchaseOrder?.lines ?? [];
   return lines.flatMap(({ name, over: { areaMm2, quantity } }) => {
     if (quantity !== null && quantity > 0) return [`${name}: ${countText(quantity)} over`];
     if (areaMm2 !== null && Number(areaMm2) > 0)
-      return [`${name}: ${areaText(areaMm2, unit)} over`];
+      return [`${name}: ${rackAreaText(areaMm2, habit)} over`];
     return [];
   });
 }
 
 /** What is on the rack now, with the tags to hang on it, and what the owner should know of it. */
 export function ReceivedSummary({ received }: { received: ReplyOf<typeof receiveDelivery> }) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const { lots, hardware, receipt } = received;
   const short = receipt?.lines.filter((line) => line.marked?.short) ?? [];
-  const over = overOf(received, areaUnit);
+  const over = overOf(received, workshop);
   return (
     <Card
       title={lots.length + hardware.length > 0 ? 'On the rack' : 'Nothing more is awaited'}
@@ -45,7 +45,7 @@ export function ReceivedSummary({ received }: { received: ReplyOf<typeof receive
               {lot.tag}
             </TextLink>
             <span className="block text-ink-soft">
-              {lot.leatherName}, {lot.form}, {areaText(lot.measuredAreaMm2, areaUnit)}
+              {lot.leatherName}, {lot.form}, {rackAreaText(lot.measuredAreaMm2, workshop)}
               {lot.place !== '' && `, ${lot.place}`}
             </span>
           </li>

@@ -22,7 +22,7 @@ interface AdjustFormProps {
 export function AdjustForm({ item }: AdjustFormProps) {
   const adjust = useAdjustStock();
   const [done, setDone] = useState<Adjusted>();
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   return (
     <div className="space-y-4">
       {done && done.broken.length > 0 && <LeftShort done={done} />}
@@ -37,7 +37,7 @@ export function AdjustForm({ item }: AdjustFormProps) {
           setDone(now);
           say(
             now.movement
-              ? `Adjusted by ${signedText(now.movement, areaUnit)}.`
+              ? `Adjusted by ${signedText(now.movement, workshop)}.`
               : 'It is as the books say.',
           );
         }}

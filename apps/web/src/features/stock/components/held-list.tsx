@@ -26,7 +26,7 @@ export function HeldLines({
   held: readonly StockReservation[];
   mayOpenJobs: boolean;
 }) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   return (
     <ul className="space-y-1">
       {held.map((row) => (
@@ -36,7 +36,7 @@ export function HeldLines({
           ) : (
             <span>{row.jobNumber}</span>
           )}
-          <span>{quantityText(row, areaUnit)}</span>
+          <span>{quantityText(row, workshop)}</span>
         </li>
       ))}
     </ul>

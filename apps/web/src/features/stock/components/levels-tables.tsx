@@ -5,7 +5,7 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, countText, moneyText } from '../../../lib/formatting.ts';
+import { rackAreaText, countText, moneyText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
@@ -74,7 +74,8 @@ function columnsFor(
 
 /** What there is of each leather. */
 export function LeatherLevels({ levels }: { levels: StockLevels }) {
-  const { areaUnit, currency } = useWorkshop();
+  const workshop = useWorkshop();
+  const { currency } = workshop;
   const rows = useMemo(
     () =>
       levels.leathers.map(({ leatherId, areaMm2, lots, name, ...level }) => ({
@@ -87,8 +88,8 @@ export function LeatherLevels({ levels }: { levels: StockLevels }) {
     [levels],
   );
   const columns = useMemo(
-    () => columnsFor(rows, { say: (area) => areaText(area, areaUnit), currency, total: true }),
-    [rows, areaUnit, currency],
+    () => columnsFor(rows, { say: (area) => rackAreaText(area, workshop), currency, total: true }),
+    [rows, workshop, currency],
   );
   return (
     <DataTable

@@ -27,7 +27,7 @@ function columnsFor(
   workshop: Workshop,
   { withValues, mixed }: { withValues: boolean; mixed: boolean },
 ): Column<StockMovement>[] {
-  const { areaUnit, currency, timeZone } = workshop;
+  const { currency, timeZone } = workshop;
   const value: Column<StockMovement> = {
     id: 'value',
     header: `At cost, ${currency}`,
@@ -49,7 +49,7 @@ function columnsFor(
       id: 'quantity',
       header: 'How much',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => signedText(row, areaUnit),
+      cell: (row) => signedText(row, workshop),
       align: 'right',
     },
     ...(withValues ? [value] : []),
