@@ -14,6 +14,7 @@ export function CountFinishedForm({ piece }: { piece: FinishedPiece }) {
       schema={countFinished.body}
       defaults={{ counted: '' as unknown as number, reason: 'Counted on the shelf' }}
       submitWord="Set it"
+      submitSize="bench"
       submitTone="secondary"
       again
       onSend={async (body) => {

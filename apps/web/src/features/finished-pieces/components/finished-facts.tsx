@@ -27,7 +27,7 @@ export function FinishedFacts({ piece }: { piece: FinishedPiece }) {
       <KeyFigures
         figures={[
           {
-            word: 'There',
+            word: 'On the shelf',
             figure: countText(onHand),
             note: piece.sort === 'seconds' ? 'seconds' : 'good ones',
           },

@@ -42,7 +42,7 @@ function columnsFor(currency: string, withValues: boolean): Column<FinishedPiece
     { id: 'place', header: 'Place', value: (row) => row.place, cell: (row) => row.place || '–' },
     {
       id: 'onHand',
-      header: 'There',
+      header: 'On the shelf',
       value: (row) => row.onHand,
       cell: (row) => countText(row.onHand),
       align: 'right',

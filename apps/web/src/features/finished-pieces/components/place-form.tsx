@@ -24,6 +24,7 @@ export function PlaceForm({ piece }: { piece: FinishedPiece }) {
       schema={changeFinishedPiece.body}
       defaults={{ place: piece.place }}
       submitWord="Save"
+      submitSize="bench"
       submitTone="secondary"
       onReload={reload}
       onSend={async (body) => {

@@ -8,10 +8,11 @@ import { countText } from '../../../lib/formatting.ts';
 import { movedWords } from '../finished-words.ts';
 import { useTakeFinished } from '../finished-pieces.mutations.ts';
 
-const ways = (['sold', 'given', 'spoiled'] as const).map((value) => ({
-  value,
-  label: movedWords[value],
-}));
+const ways = [
+  { value: 'sold', label: 'Sold' },
+  { value: 'given', label: 'Given away' },
+  { value: 'spoiled', label: 'Spoiled' },
+];
 
 /** Takes pieces from the shelf, with a word on what became of them. */
 export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
@@ -21,6 +22,7 @@ export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
       schema={takeFinished.body}
       defaults={{ as: 'sold', quantity: '' as unknown as number, reason: '' }}
       submitWord="Take them"
+      submitSize="bench"
       again
       onSend={async (body) => {
         const now = await take.mutateAsync({ params: { id: piece.id }, body });

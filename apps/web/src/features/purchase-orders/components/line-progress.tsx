@@ -32,12 +32,12 @@ export function LineProgress({ line, order, today, onChangeDay, onCloseLine }: L
         </span>
       )}
       {onChangeDay && (
-        <Button tone="quiet" className="-ml-3.5" onClick={onChangeDay}>
+        <Button tone="quiet" className="-mr-3.5 md:mr-0 md:-ml-3.5" onClick={onChangeDay}>
           Another day<span className="sr-only">{` for ${line.name}`}</span>
         </Button>
       )}
       {onCloseLine && (
-        <Button tone="quiet" className="-ml-3.5" onClick={onCloseLine}>
+        <Button tone="quiet" className="-mr-3.5 md:mr-0 md:-ml-3.5" onClick={onCloseLine}>
           Nothing more<span className="sr-only">{` of ${line.name}`}</span>
         </Button>
       )}
