@@ -1,0 +1,12 @@
+import { expect, it } from 'vitest';
+import { leadTime } from './lead-time.ts';
+
+it('is what the supplier says until three deliveries say otherwise', () => {
+  expect(leadTime(10, [4, 20])).toEqual({ meanDays: 10, sdDays: 0, deliveries: 0 });
+  expect(leadTime(10, [8, 12, 16])).toEqual({ meanDays: 12, sdDays: 4, deliveries: 3 });
+});
+
+it('refuses days below 0', () => {
+  expect(() => leadTime(-1, [])).toThrow('said');
+  expect(() => leadTime(1, [-1])).toThrow('took.0');
+});
