@@ -18,6 +18,7 @@ import * as links from './links.ts';
 import * as lotPhotos from './lot-photos.ts';
 import * as lotSearches from './lot-searches.ts';
 import * as lots from './lots.ts';
+import * as orderSuggestions from './order-suggestions.ts';
 import * as orders from './orders.ts';
 import * as patterns from './patterns.ts';
 import * as people from './people.ts';
@@ -88,6 +89,7 @@ const rooms: Record<string, unknown>[] = [
   stock,
   stockLevels,
   finishedPieces,
+  orderSuggestions,
   counts,
   labels,
   invoices,

@@ -24,6 +24,7 @@ export * from './links.ts';
 export * from './lot-photos.ts';
 export * from './lot-searches.ts';
 export * from './lots.ts';
+export * from './order-suggestions.ts';
 export * from './orders.ts';
 export * from './patterns.ts';
 export * from './people.ts';

@@ -38,6 +38,8 @@ const typed = {
   wholeForm: z.enum(leatherForms, 'Choose a form.').nullable(),
   wholeAreaMm2: areaMm2.refine((text) => Number(text) >= 1000, 'Enter an area above 0.').nullable(),
   wholeUsablePercent: percent.refine((text) => Number(text) >= 1, 'Enter a share from 1 to 100 %.'),
+  /** Free stock below this is worth an order; null where nobody minds. */
+  reorderAtMm2: areaMm2.refine((text) => Number(text) > 0, 'Enter an area above 0.').nullable(),
 };
 
 export const leather = z
@@ -55,6 +57,7 @@ export const leather = z
     wholeForm: z.enum(leatherForms).nullable(),
     wholeAreaMm2: z.string().nullable(),
     wholeUsablePercent: z.string(),
+    reorderAtMm2: z.string().nullable(),
     active: z.boolean(),
     /** Of all its lots together. */
     onHandAreaMm2: z.string(),
@@ -103,6 +106,7 @@ export const addLeather = endpoint({
     wholeForm: typed.wholeForm.default(null),
     wholeAreaMm2: typed.wholeAreaMm2.default(null),
     wholeUsablePercent: typed.wholeUsablePercent.default('85'),
+    reorderAtMm2: typed.reorderAtMm2.default(null),
   }),
   reply: leather,
 });

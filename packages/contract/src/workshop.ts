@@ -71,6 +71,15 @@ const settings = {
   taxNumber: optionalLine(40),
   /** How far a side may miss the area marked on it before the receipt says so. */
   areaTolerancePercent: percent,
+  /** How sure stock should last until a delivery comes. */
+  servicePercent: percent.refine(
+    (text) => Number(text) >= 50 && Number(text) < 100,
+    'Enter a share from 50 to below 100 %.',
+  ),
+  /** Of placing one order with a supplier. */
+  orderCost: money.refine((text) => Number(text) > 0, 'Enter a cost above 0, such as 10.'),
+  /** Keeping a thing for a year costs this share of its price. */
+  holdingPercent: percent.refine((text) => Number(text) > 0, 'Enter a share above 0, up to 100 %.'),
 };
 
 export const workshop = z
@@ -107,6 +116,9 @@ export const workshop = z
     address: z.string(),
     taxNumber: confidential(z.string()),
     areaTolerancePercent: z.string(),
+    servicePercent: z.string(),
+    orderCost: confidential(z.string()),
+    holdingPercent: z.string(),
     mode: z.enum(['demo', 'shop']),
     /** Whether mail can leave; papers are handed over by hand while it cannot. */
     mailAvailable: z.boolean(),

@@ -42,6 +42,14 @@ export class Hardware {
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   supplierId: number | null = null;
 
+  /** Set by the owner: order when less than this is left … */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  orderPoint: number | null = null;
+
+  /** … and so many at a time. */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  orderQuantity: number | null = null;
+
   /** What one of it is: counted whole. */
   @Property({ type: 'text', columnType: 'text' })
   unit: HardwareUnit = 'piece';

@@ -42,6 +42,18 @@ export class Leather {
   @Property({ type: AreaType, columnType: 'integer', nullable: true })
   wholeAreaMm2: Decimal | null = null;
 
+  /** Free stock below this is worth an order; null where nobody minds. */
+  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  reorderAtMm2: Decimal | null = null;
+
+  /** Set by the owner: order when less than this is left … */
+  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  orderPointMm2: Decimal | null = null;
+
+  /** … and so much at a time. */
+  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  orderQuantityMm2: Decimal | null = null;
+
   @Property({ type: PercentType, columnType: 'integer' })
   wholeUsablePercent: Decimal = new Decimal(85);
 

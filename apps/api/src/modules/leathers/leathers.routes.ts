@@ -53,6 +53,7 @@ export function leatherRoutes(context: Context): Router {
       ...weights(body),
       wholeAreaMm2: decimalOrNull(body.wholeAreaMm2),
       wholeUsablePercent: new Decimal(body.wholeUsablePercent),
+      reorderAtMm2: decimalOrNull(body.reorderAtMm2),
     });
     await work.em.flush();
     await logDeed(work, {
@@ -72,9 +73,10 @@ export function leatherRoutes(context: Context): Router {
     );
     if (body.name !== undefined) await requireFreeName(work.em, Leather, body.name, leather.id);
     await requireSupplier(work, body.supplierId);
-    const { pricePerFt2, weightLowOz, weightHighOz, wholeAreaMm2, wholeUsablePercent, ...plain } =
-      body;
+    const { pricePerFt2, weightLowOz, weightHighOz, ...others } = body;
+    const { wholeAreaMm2, wholeUsablePercent, reorderAtMm2, ...plain } = others;
     assignDefined(leather, plain);
+    if (reorderAtMm2 !== undefined) leather.reorderAtMm2 = decimalOrNull(reorderAtMm2);
     if (pricePerFt2 !== undefined) leather.pricePerFt2 = new Decimal(pricePerFt2);
     if (wholeAreaMm2 !== undefined) leather.wholeAreaMm2 = decimalOrNull(wholeAreaMm2);
     if (wholeUsablePercent !== undefined)
@@ -147,6 +149,7 @@ function toReply(leather: Leather, stock: LeatherStock): LeatherReply {
     wholeForm: leather.wholeForm,
     wholeAreaMm2: leather.wholeAreaMm2?.toString() ?? null,
     wholeUsablePercent: leather.wholeUsablePercent.toString(),
+    reorderAtMm2: leather.reorderAtMm2?.toString() ?? null,
     supplierName: stock.supplierNames.get(leather.supplierId ?? 0) ?? null,
     active: leather.active,
     ...stock.areasOf(leather.id),

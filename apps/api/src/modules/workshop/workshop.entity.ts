@@ -36,6 +36,9 @@ export class Workshop {
     | 'address'
     | 'taxNumber'
     | 'areaTolerancePercent'
+    | 'servicePercent'
+    | 'orderCost'
+    | 'holdingPercent'
     | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
@@ -152,6 +155,18 @@ export class Workshop {
   /** How far a side may miss the area marked on it. */
   @Property({ type: PercentType, columnType: 'integer' })
   areaTolerancePercent: Decimal = new Decimal(3);
+
+  /** How sure stock should last until a delivery comes. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  servicePercent: Decimal = new Decimal(95);
+
+  /** Of placing one order with a supplier. */
+  @Property({ type: MoneyType, columnType: 'integer' })
+  orderCost: Decimal = new Decimal(10);
+
+  /** Keeping a thing for a year costs this share of its price. */
+  @Property({ type: PercentType, columnType: 'integer' })
+  holdingPercent: Decimal = new Decimal(20);
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
   version!: number;

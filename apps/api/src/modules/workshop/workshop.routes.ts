@@ -64,6 +64,9 @@ const decimalFields = [
   'setUpCharge',
   'minimumOrder',
   'areaTolerancePercent',
+  'servicePercent',
+  'orderCost',
+  'holdingPercent',
 ] as const;
 type DecimalField = (typeof decimalFields)[number];
 
@@ -131,6 +134,9 @@ function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {
     address: workshop.address,
     taxNumber: workshop.taxNumber,
     areaTolerancePercent: workshop.areaTolerancePercent.toString(),
+    servicePercent: workshop.servicePercent.toString(),
+    orderCost: moneyText(workshop.orderCost),
+    holdingPercent: workshop.holdingPercent.toString(),
     mode: workshop.mode,
     mailAvailable,
     version: workshop.version,
