@@ -27,6 +27,7 @@ import { linkRoutes } from './modules/links/links.routes.ts';
 import { lotPhotoRoutes } from './modules/lots/lot-photos.routes.ts';
 import { lotSearchRoutes } from './modules/lots/lot-searches.routes.ts';
 import { lotRoutes } from './modules/lots/lots.routes.ts';
+import { orderSuggestionRoutes } from './modules/order-suggestions/order-suggestions.routes.ts';
 import { orderRoutes } from './modules/orders/orders.routes.ts';
 import { learnedRoutes } from './modules/patterns/learned.routes.ts';
 import { patternRoutes } from './modules/patterns/patterns.routes.ts';
@@ -90,6 +91,7 @@ const rooms: ((context: Context) => Router)[] = [
   supplierReturnRoutes,
   stockRoutes,
   stockLevelRoutes,
+  orderSuggestionRoutes,
   countRoutes,
   finishedPieceRoutes,
   labelRoutes,

@@ -131,9 +131,7 @@ export const orderByHand = endpoint({
   access: ['owner'],
   edits: true,
   params: z.strictObject({ of: thing.of, id: z.coerce.number().int().positive() }),
-  body: z
-    .strictObject({ point: quantity.nullable(), quantity: above0.nullable() })
-    .partial(),
+  body: z.strictObject({ point: quantity.nullable(), quantity: above0.nullable() }).partial(),
   reply: orderSuggestion,
 });
 

@@ -50,6 +50,9 @@ export interface OrderSuggestion {
   /** what one order would be today: sold quantities only */
   usual: DecimalText;
   usualBy: 'hand' | 'year' | 'need';
+  /** what one priced unit of it costs then, and all of it; 2 places */
+  usualPrice: DecimalText;
+  usualCost: DecimalText;
   /** that costs least over a year, unrounded; null without use or price */
   economic: number | null;
   /** days until the position is expected to fall below the point; null where no use is expected */
@@ -76,12 +79,9 @@ export function orderSuggestion(input: OrderInput): OrderSuggestion {
   const due = dueInDays !== null && dueInDays <= soonDays;
   const state =
     total < point ? 'now' : position < point ? 'drafted' : due ? 'soon' : ('fine' as const);
-  const { usual, usualBy, economic } = usualOrder(input, point - total);
-  const quantity = state === 'now' ? usual : '0';
-  return {
-    ...{ state, position, point, pointBy, workedOut },
-    ...{ quantity, usual, usualBy, economic, dueInDays },
-  };
+  const order = usualOrder(input, point - total);
+  const quantity = state === 'now' ? order.usual : '0';
+  return { state, position, point, pointBy, workedOut, quantity, ...order, dueInDays };
 }
 
 function positionOf(input: OrderInput): number {
@@ -123,10 +123,15 @@ function usualOrder(input: OrderInput, missing: number) {
     pricedAmount: input.pricedAmount,
     offers: [{ ...input.terms, id: 0, leadDays: 0, preferred: true }],
   });
-  const sold = buy === undefined ? null : byHand === null ? buy.best : buy.plain;
-  const usual = sold === null ? toText(needed) : sold.quantity;
-  const usualBy = missing > wanted || wanted === 0 ? 'need' : byHand === null ? 'year' : 'hand';
-  return { usual, usualBy: usualBy as OrderSuggestion['usualBy'], economic };
+  if (buy === undefined) throw new Error('One offer is asked, and one is answered');
+  const {
+    quantity: usual,
+    price: usualPrice,
+    cost: usualCost,
+  } = byHand === null ? buy.best : buy.plain;
+  const planned = byHand === null ? ('year' as const) : ('hand' as const);
+  const usualBy = missing > wanted || wanted === 0 ? ('need' as const) : planned;
+  return { usual, usualBy, usualPrice, usualCost, economic };
 }
 
 /** At most a year's use: what lies longer ages. */

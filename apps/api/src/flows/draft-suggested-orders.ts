@@ -1,0 +1,142 @@
+import type { BodyOf, draftSuggested, PurchaseLineTyped } from '@hidewright/contract';
+import { addDays, Exact } from '@hidewright/domain';
+import { Decimal } from 'decimal.js';
+import { unscaled } from '../db/columns/scaled-decimal.ts';
+import { priceText } from '../http/decimal-text.ts';
+import { invalid } from '../http/problem.ts';
+import {
+  changeDraft,
+  draftPurchaseOrder,
+} from '../modules/purchase-orders/draft-purchase-order.ts';
+import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts';
+import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
+import type { Work } from '../work.ts';
+import { suggestOrders, type Suggested } from './order-suggestions/suggest-orders.ts';
+
+type AskedLine = BodyOf<typeof draftSuggested>['lines'][number];
+
+interface Wanted {
+  item: Suggested;
+  asked: AskedLine;
+}
+
+interface Drafted {
+  orderIds: number[];
+  notes: string[];
+}
+
+const mostLines = 100;
+
+/**
+ * Puts what is asked for on the newest draft to its supplier, or on a new one: one draft for each supplier, and one
+ * line for each thing. What came on a draft since it was looked at is left alone.
+ * @throws {Problem} 422 for a thing that is not bought, or parts of a piece
+ */
+export async function draftSuggestedOrders(
+  work: Work,
+  lines: readonly AskedLine[],
+): Promise<Drafted> {
+  const { items } = await suggestOrders(work);
+  const wanted = lines.map((asked, at) => ({ item: itemFor(items, asked, at), asked }));
+  const notes = wanted.flatMap(noteOn);
+  const able = wanted.filter((each) => noteOn(each).length === 0);
+  const orderIds: number[] = [];
+  for (const supplierId of new Set(able.map(({ item }) => item.sold.supplier?.id ?? 0))) {
+    const own = able.filter(({ item }) => item.sold.supplier?.id === supplierId);
+    orderIds.push(await putOnDraft(work, supplierId, own));
+  }
+  return { orderIds, notes };
+}
+
+function itemFor(items: readonly Suggested[], asked: AskedLine, at: number): Suggested {
+  const field = `lines.${at}.id`;
+  const item = items.find(({ row }) => row.of === asked.of && row.id === asked.id);
+  if (item === undefined) {
+    throw invalid([{ field, message: 'Choose something that the shop buys.' }]);
+  }
+  if (asked.of === 'hardware' && !Number.isInteger(Number(asked.quantity))) {
+    throw invalid([{ field: `lines.${at}.quantity`, message: 'Enter whole pieces.' }]);
+  }
+  return item;
+}
+
+function noteOn({ item, asked }: Wanted): string[] {
+  const { name } = item.row;
+  if (item.sold.supplier === null) {
+    return [`${name} has no supplier. Say who sells it, then draft again.`];
+  }
+  if (new Decimal(asked.drafted).equals(item.amounts.drafted)) return [];
+  const drafts = item.open.drafts.map(({ number }) => number).join(' and ');
+  return [
+    drafts === ''
+      ? `${name} is on a draft no more. Look at it again, then draft.`
+      : `${name} is on draft ${drafts} by now. Look at it again before you draft more.`,
+  ];
+}
+
+async function putOnDraft(
+  work: Work,
+  supplierId: number,
+  wanted: readonly Wanted[],
+): Promise<number> {
+  const draft = await newestDraft(work, supplierId);
+  const there = draft === null ? [] : await linesOf(work, draft);
+  const lines = wanted.reduce(withWanted, there);
+  if (draft !== null && lines.length <= mostLines) {
+    await changeDraft(work, draft, { lines });
+    return draft.id;
+  }
+  const leadDays = Math.max(...wanted.map(({ item }) => Math.round(item.lead.meanDays)));
+  const made = await draftPurchaseOrder(work, {
+    supplierId,
+    expectedOn: addDays(work.today, leadDays),
+    note: '',
+    lines: wanted.reduce(withWanted, []),
+  });
+  return made.id;
+}
+
+const newestDraft = ({ em }: Work, supplierId: number): Promise<PurchaseOrder | null> =>
+  em.findOne(PurchaseOrder, { supplierId, state: 'draft' }, { orderBy: { id: 'desc' } });
+
+async function linesOf({ em }: Work, draft: PurchaseOrder): Promise<PurchaseLineTyped[]> {
+  const lines = await em.find(
+    PurchaseLine,
+    { purchaseOrderId: draft.id },
+    { orderBy: { position: 'asc' } },
+  );
+  return lines.map(({ leatherId, hardwareId, quantity, unitPrice }) =>
+    leatherId === null
+      ? { of: 'hardware', hardwareId: hardwareId ?? 0, quantity, unitPrice: priceText(unitPrice) }
+      : {
+          of: 'leather',
+          leatherId,
+          areaMm2: unscaled(quantity, 3).toFixed(),
+          unitPrice: priceText(unitPrice),
+        },
+  );
+}
+
+/** More of what is on the draft already goes to its line, at the price of both together. */
+function withWanted(
+  lines: readonly PurchaseLineTyped[],
+  { item, asked }: Wanted,
+): PurchaseLineTyped[] {
+  const at = lines.findIndex((line) =>
+    line.of === 'leather'
+      ? asked.of === 'leather' && line.leatherId === asked.id
+      : asked.of === 'hardware' && line.hardwareId === asked.id,
+  );
+  const there = lines[at];
+  if (there === undefined) return [...lines, lineFor(item, asked.quantity)];
+  const before = there.of === 'leather' ? there.areaMm2 : there.quantity;
+  return lines.with(at, lineFor(item, new Exact(before).plus(asked.quantity).toFixed()));
+}
+
+function lineFor({ row, sold }: Suggested, quantity: string): PurchaseLineTyped {
+  const reached = sold.terms.breaks.findLast(({ from }) => new Exact(from).lte(quantity));
+  const unitPrice = priceText(new Decimal((reached ?? sold.terms.breaks[0])?.price ?? '0'));
+  return row.of === 'leather'
+    ? { of: 'leather', leatherId: row.id, areaMm2: quantity, unitPrice }
+    : { of: 'hardware', hardwareId: row.id, quantity: Number(quantity), unitPrice };
+}

@@ -1,0 +1,48 @@
+import type { SupplierOfferReply } from '@hidewright/contract';
+import { Exact, type OfferTerms } from '@hidewright/domain';
+import type { Supplier } from '../../modules/suppliers/supplier.entity.ts';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import type { ItemRow } from './ordered-items.ts';
+
+/** Who a thing is ordered from, and as they sell it. */
+export interface ItemTerms {
+  supplier: Supplier | null;
+  leadDays: number;
+  terms: OfferTerms;
+}
+
+/**
+ * The offer that is preferred, or else the one of the supplier that the thing names; without an offer the thing's own
+ * price and pack, and whole sides where that is how a leather is bought.
+ */
+export function itemTerms(
+  row: ItemRow,
+  offers: readonly SupplierOfferReply[],
+  suppliers: ReadonlyMap<number, Supplier>,
+): ItemTerms {
+  const offer =
+    offers.find(({ preferred }) => preferred) ??
+    offers.find(({ supplierId }) => supplierId === row.supplier_id);
+  const supplier = suppliers.get(offer?.supplierId ?? row.supplier_id ?? 0) ?? null;
+  const leadDays = offer?.usualLeadDays ?? supplier?.leadDays ?? 0;
+  return { supplier, leadDays, terms: offer === undefined ? ownTerms(row) : offered(row, offer) };
+}
+
+function ownTerms(row: ItemRow): OfferTerms {
+  const price = unscaled(row.price, 4).toFixed();
+  return { minimum: null, multiple: packOf(row), breaks: [{ from: '0', price }] };
+}
+
+function offered(row: ItemRow, { minimum, multiple, breaks = [] }: SupplierOfferReply): OfferTerms {
+  const pack = multiple ?? (row.of === 'leather' ? packOf(row) : '1');
+  return { minimum: minimum === null ? null : inPacks(minimum, pack), multiple: pack, breaks };
+}
+
+/** Leather that is not bought whole comes in any area, to a mm². */
+function packOf(row: ItemRow): string {
+  if (row.of === 'hardware') return String(row.pack_size);
+  return row.whole_area === null ? '1' : unscaled(row.whole_area, 3).toFixed();
+}
+
+const inPacks = (minimum: string, pack: string): string =>
+  new Exact(minimum).div(pack).ceil().times(pack).toFixed();

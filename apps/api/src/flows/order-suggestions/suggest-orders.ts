@@ -1,0 +1,136 @@
+import {
+  comingStock,
+  dailyUse,
+  itemUse,
+  leadTime,
+  MM2_PER_FT2,
+  orderSuggestion,
+  type ComingStock,
+  type Dated,
+  type ItemUse,
+  type LeadTime,
+  type OrderSuggestion,
+} from '@hidewright/domain';
+import { Supplier } from '../../modules/suppliers/supplier.entity.ts';
+import { Workshop } from '../../modules/workshop/workshop.entity.ts';
+import type { Work } from '../../work.ts';
+import { readOwedToJobs, type OwedToJobs } from '../check/owed-to-jobs.ts';
+import { readDaysTaken } from './days-taken.ts';
+import { itemTerms, type ItemTerms } from './item-terms.ts';
+import { readOffersByItem } from './offers-by-item.ts';
+import { readOpenLines, type OpenLines } from './open-lines.ts';
+import { readOrderedItems, type ItemRow } from './ordered-items.ts';
+import { readUsedByWeek } from './used-by-week.ts';
+
+/** How much there is of a thing, in pieces, or in mm². */
+interface Amounts {
+  onHand: number;
+  reserved: number;
+  free: number;
+  promised: number;
+  onOrder: number;
+  drafted: number;
+  minimum: number;
+}
+
+/** A thing with all that is known of it and what follows. */
+export interface Suggested {
+  row: ItemRow;
+  sold: ItemTerms;
+  use: ItemUse;
+  lead: LeadTime;
+  amounts: Amounts;
+  open: OpenLines;
+  suggestion: OrderSuggestion;
+  coming: ComingStock;
+}
+
+export interface Suggestions {
+  items: Suggested[];
+  workshop: Workshop;
+  today: string;
+}
+
+interface Known {
+  workshop: Workshop;
+  today: string;
+  suppliers: ReadonlyMap<number, Supplier>;
+  offers: Awaited<ReturnType<typeof readOffersByItem>>;
+  used: Awaited<ReturnType<typeof readUsedByWeek>>;
+  daysTaken: Awaited<ReturnType<typeof readDaysTaken>>;
+  openLines: Awaited<ReturnType<typeof readOpenLines>>;
+  owed: OwedToJobs;
+}
+
+/** What should be ordered of everything that is bought, in as many questions to the database whatever there is. */
+export async function suggestOrders({ em, today }: Work): Promise<Suggestions> {
+  const rows = await readOrderedItems(em);
+  const suppliers = await em.find(Supplier, {});
+  const known: Known = {
+    workshop: await em.findOneOrFail(Workshop, 1),
+    today,
+    suppliers: new Map(suppliers.map((each) => [each.id, each])),
+    offers: await readOffersByItem(em),
+    used: await readUsedByWeek(em, today),
+    daysTaken: await readDaysTaken(em, today),
+    openLines: await readOpenLines(em, today),
+    owed: await readOwedToJobs(em),
+  };
+  const items = rows.map((row) => suggestFor(row, known));
+  return { items, workshop: known.workshop, today };
+}
+
+/** The ledger counts leather in thousandths of mm². */
+const counted = ({ of }: ItemRow, kept: number): number => (of === 'leather' ? kept / 1000 : kept);
+
+function suggestFor(row: ItemRow, known: Known): Suggested {
+  const key = `${row.of} ${row.id}`;
+  const sold = itemTerms(row, known.offers(key), known.suppliers);
+  const use = itemUse(known.used(key).map((kept) => counted(row, kept)));
+  const took = sold.supplier === null ? [] : known.daysTaken(sold.supplier.id);
+  const lead = leadTime(sold.leadDays, took);
+  const open = known.openLines(key);
+  const owed = row.of === 'leather' ? known.owed.leather(row.id) : known.owed.hardware(row.id);
+  const [promised, receipts] = [inUnits(row, owed), inUnits(row, open.receipts)];
+  const amounts = amountsOf(row, open, promised);
+  const suggestion = orderSuggestion({
+    ...amounts,
+    ...{ use, lead, terms: sold.terms, ...ratesOf(known.workshop) },
+    pricedAmount: row.of === 'leather' ? MM2_PER_FT2 : '1',
+    byHand: byHandOf(row),
+  });
+  const { today } = known;
+  const coming = comingStock({ ...amounts, promised, receipts, today, daily: dailyUse(use) });
+  return { row, sold, use, lead, amounts, open, suggestion, coming };
+}
+
+const inUnits = (row: ItemRow, all: readonly Dated[]): Dated[] =>
+  all.map((each) => ({ ...each, quantity: counted(row, each.quantity) }));
+
+function amountsOf(row: ItemRow, open: OpenLines, promised: readonly Dated[]): Amounts {
+  return {
+    onHand: counted(row, row.on_hand),
+    reserved: counted(row, row.reserved),
+    free: counted(row, row.free),
+    promised: promised.reduce((sum, { quantity }) => sum + quantity, 0),
+    onOrder: counted(row, open.onOrder),
+    drafted: counted(row, open.drafted),
+    minimum: counted(row, row.minimum),
+  };
+}
+
+function byHandOf(row: ItemRow) {
+  const { order_point: point, order_quantity: quantity } = row;
+  return {
+    point: point === null ? null : counted(row, point),
+    quantity: quantity === null ? null : String(counted(row, quantity)),
+  };
+}
+
+function ratesOf({ servicePercent, orderCost, holdingPercent }: Workshop) {
+  return {
+    service: servicePercent.dividedBy(100).toNumber(),
+    orderCost: orderCost.toString(),
+    holdingRate: holdingPercent.dividedBy(100).toNumber(),
+  };
+}

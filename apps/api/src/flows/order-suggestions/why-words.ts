@@ -1,0 +1,69 @@
+import { dailyUse } from '@hidewright/domain';
+import { sayDay } from '../../modules/quotes/say-day.ts';
+import type { Suggested } from './suggest-orders.ts';
+
+/** How the shop says quantities of a thing: 1,250, or 24.5 ft². */
+export type Say = (quantity: number) => string;
+
+/** Why a thing should be ordered or not, and why so much; for the maker as well: never a price. */
+export function whyWords(item: Suggested, say: Say, dueOn: string | null): string {
+  const { overdue } = item.open;
+  const late = overdue.length === 0 ? '' : `${overdue.join(' and ')} should have come by now.`;
+  return [...standing(item, say, dueOn), late].filter((words) => words !== '').join(' ');
+}
+
+function standing(item: Suggested, say: Say, dueOn: string | null): string[] {
+  const { state, point } = item.suggestion;
+  const have = haveWords(item, say);
+  const mark = pointWords(item, say);
+  if (state === 'now')
+    return [`${have}, below ${mark}.`, draftWords(item, say), orderWords(item, say)];
+  if (state === 'drafted') {
+    return [`${have}, below ${mark}.`, `What is on ${draftNames(item)} will do: send it.`];
+  }
+  if (state === 'soon') {
+    const when = dueOn === null ? '' : ` about ${sayDay(dueOn)}`;
+    return [`${have}. At ${rateWords(item, say)} it falls below ${mark}${when}.`];
+  }
+  return [`${have}: enough. It is ordered below ${say(point)}.`];
+}
+
+function haveWords({ amounts, suggestion }: Suggested, say: Say): string {
+  const { free, onOrder, promised } = amounts;
+  const { position } = suggestion;
+  const order = onOrder > 0 ? ` and ${say(onOrder)} on order` : '';
+  if (promised === 0) return `${freeWords(free, say)}${order}`;
+  const left =
+    position < 0 ? `${say(-position)} too few for that` : `which leaves ${say(position)}`;
+  return `${freeWords(free, say)}${order}, ${say(promised)} promised beyond what is held, ${left}`;
+}
+
+const freeWords = (free: number, say: Say): string =>
+  free === 0 ? 'None free' : `${say(free)} free`;
+
+function pointWords({ suggestion, lead, ...item }: Suggested, say: Say): string {
+  const { point, pointBy } = suggestion;
+  if (pointBy === 'hand') return `the ${say(point)} set by hand`;
+  if (pointBy === 'minimum') return point === 0 ? 'nothing' : `the minimum of ${say(point)}`;
+  const days = Math.round(lead.meanDays);
+  return `the ${say(point)} that last until a delivery: it takes about ${days} ${days === 1 ? 'day' : 'days'}, at ${rateWords(item, say)}`;
+}
+
+const rateWords = ({ use }: Pick<Suggested, 'use'>, say: Say): string =>
+  `about ${say(dailyUse(use) * 7)} a week`;
+
+function draftWords({ amounts, ...item }: Suggested, say: Say): string {
+  return amounts.drafted > 0 ? `${say(amounts.drafted)} on ${draftNames(item)} is not enough.` : '';
+}
+
+const draftNames = ({ open }: Pick<Suggested, 'open'>): string =>
+  `draft ${open.drafts.map(({ number }) => number).join(' and ')}`;
+
+function orderWords({ suggestion, use }: Suggested, say: Say): string {
+  const quantity = Number(suggestion.quantity);
+  const { usualBy } = suggestion;
+  if (usualBy === 'hand') return `Order ${say(quantity)}, as set by hand.`;
+  if (usualBy === 'need') return `Order ${say(quantity)} to fill it up.`;
+  const weeks = Math.max(1, Math.round(quantity / (dailyUse(use) * 7)));
+  return `Order ${say(quantity)}: ${weeks === 1 ? 'a week’s' : `about ${weeks} weeks’`} use, which costs least over a year.`;
+}
