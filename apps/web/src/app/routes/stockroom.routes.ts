@@ -23,6 +23,11 @@ export const stockroomRoutes: RouteObject[] = [
         lazy: () => import('./stockroom/on-hand.tsx'),
       },
       {
+        path: 'to-order',
+        handle: { crumb: 'To order' },
+        lazy: () => import('./stockroom/to-order.tsx'),
+      },
+      {
         path: 'tags',
         handle: { crumb: 'Tags' },
         lazy: () => import('./stockroom/labels.tsx'),

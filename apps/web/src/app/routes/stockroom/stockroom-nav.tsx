@@ -1,4 +1,5 @@
 import { SectionNav, type SectionLink } from '../../../components/section-nav.tsx';
+import { useRole } from './use-role.ts';
 
 const items: SectionLink[] = [
   { to: '/stockroom/leather', word: 'Leather' },
@@ -6,6 +7,7 @@ const items: SectionLink[] = [
   { to: '/stockroom/hardware', word: 'Hardware and supplies' },
   { to: '/stockroom/finished', word: 'Finished pieces' },
   { to: '/stockroom/suppliers', word: 'Suppliers' },
+  { to: '/stockroom/to-order', word: 'To order' },
   { to: '/stockroom/purchase-orders', word: 'Purchase orders' },
   { to: '/stockroom/on-hand', word: 'On hand' },
   { to: '/stockroom/ledger', word: 'Ledger' },
@@ -15,5 +17,7 @@ const items: SectionLink[] = [
 ];
 
 export function StockroomNav() {
-  return <SectionNav label="Stockroom" items={items} />;
+  const { handlesStock } = useRole();
+  const mine = handlesStock ? items : items.filter(({ to }) => to !== '/stockroom/to-order');
+  return <SectionNav label="Stockroom" items={mine} />;
 }

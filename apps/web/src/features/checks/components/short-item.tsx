@@ -1,8 +1,8 @@
 import type { ShortForRuns } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { rackAreaText, countText, dayText } from '../../../lib/formatting.ts';
+import { WeeksPicture } from '../../../components/weeks-picture.tsx';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { WeeksPicture } from './weeks-picture.tsx';
 
 /** What is short of one thing, by when it can be here, and how it goes on: a picture, and the same as a table. */
 export function ShortItem({ item }: { item: ShortForRuns }) {

@@ -13,6 +13,7 @@ const blank = {
   colour: '',
   finish: '',
   supplierId: null,
+  reorderAtMm2: null,
   wholeForm: null,
   wholeAreaMm2: null,
   wholeUsablePercent: '85',

@@ -55,6 +55,7 @@ function typedOf(leather: Leather) {
     weightLowOz: leather.weightLowOz,
     weightHighOz: leather.weightHighOz,
     supplierId: leather.supplierId,
+    reorderAtMm2: leather.reorderAtMm2,
     wholeForm: leather.wholeForm,
     wholeAreaMm2: leather.wholeAreaMm2,
     wholeUsablePercent: leather.wholeUsablePercent,

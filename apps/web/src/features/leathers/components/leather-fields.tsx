@@ -1,5 +1,6 @@
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { useWatch } from 'react-hook-form';
+import { AreaField } from '../../../components/area-field.tsx';
 import { AreaPriceField } from '../../../components/area-price-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
@@ -39,6 +40,13 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
           choices={suppliers}
         />
       )}
+      <AreaField
+        name="reorderAtMm2"
+        label="Order when less is free than"
+        help="What to order counts on it; empty where it is bought for a run."
+        optional
+        whenEmpty="null"
+      />
       <WholeFields />
     </>
   );

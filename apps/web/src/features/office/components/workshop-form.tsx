@@ -11,6 +11,7 @@ import { TextArea } from '../../../components/text-area.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { useChangeWorkshop } from '../office.mutations.ts';
+import { OrderingFields } from './ordering-fields.tsx';
 import { ChargesFields, RatesFields } from './rates-fields.tsx';
 
 const areaUnits = [
@@ -143,6 +144,7 @@ export function WorkshopForm({
         help="A change holds for what moves from then on: what is there that day keeps its worth and goes first. A lot always stands at its own cost."
         choices={stockValueChoices}
       />
+      <OrderingFields />
     </Form>
   );
 }

@@ -8,7 +8,7 @@ export function RunsShort({ short }: { short: NonNullable<Today['short']> }) {
     <Card
       title="Runs short"
       subtitle="less free than the shop wants to keep"
-      aside={<TextLink to="/stockroom">Stockroom</TextLink>}
+      aside={<TextLink to="/stockroom/to-order">What to order</TextLink>}
     >
       {short.length === 0 ? (
         <p className="text-ink-soft">Everything that is counted is above its mark.</p>

@@ -1,8 +1,7 @@
-import type { ShortForRuns } from '@hidewright/contract';
 import { addDays, daysBetween } from '@hidewright/domain';
-import { dayText } from '../../../lib/formatting.ts';
-import { useWorkshop } from '../../../lib/workshop.tsx';
-import { weekSteps } from '../week-steps.ts';
+import { dayText } from '../lib/formatting.ts';
+import { useWorkshop } from '../lib/workshop.tsx';
+import { weekSteps, type ComingOf } from './week-steps.ts';
 
 const [wide, high] = [600, 120];
 /** Two weeks at least, so that a single day is not stretched over the page. */
@@ -12,9 +11,12 @@ const fewestDays = 14;
 export function WeeksPicture({
   item,
   say,
+  mark,
 }: {
-  item: ShortForRuns;
+  item: ComingOf;
   say: (value: string) => string;
+  /** A quantity that should not be passed, drawn as a dashed line with its word. */
+  mark?: { word: string; at: number } | undefined;
 }) {
   const { today } = useWorkshop();
   const last = item.days.at(-1)?.day ?? today;
@@ -24,7 +26,7 @@ export function WeeksPicture({
     Math.max(...steps.map(({ left }) => left)),
     Math.min(...steps.map(({ left }) => left)),
   ];
-  const [top, bottom] = [Math.max(0, most), Math.min(0, least)];
+  const [top, bottom] = [Math.max(0, most, mark?.at ?? 0), Math.min(0, least)];
   const y = (left: number) => 8 + ((top - left) / (top - bottom || 1)) * (high - 16);
   const x = (after: number) => (after / days) * wide;
   const path = steps
@@ -50,6 +52,18 @@ export function WeeksPicture({
           className="stroke-edge"
           vectorEffect="non-scaling-stroke"
         />
+        {mark !== undefined && (
+          <line
+            x1="0"
+            x2={wide}
+            y1={y(mark.at)}
+            y2={y(mark.at)}
+            strokeDasharray="2 5"
+            strokeWidth="2"
+            className="stroke-brass"
+            vectorEffect="non-scaling-stroke"
+          />
+        )}
         {out !== null && (
           <line
             x1={out}
@@ -72,6 +86,7 @@ export function WeeksPicture({
       </svg>
       <figcaption className="mt-1 flex flex-wrap justify-between gap-x-4 text-sm text-ink-soft">
         <span>{dayText(today, today)}</span>
+        {mark !== undefined && <span className="text-brass">{`dotted: ${mark.word}`}</span>}
         {item.runsOutOn !== null && (
           <span className="text-oxblood">{`too little from ${dayText(item.runsOutOn, today)}`}</span>
         )}

@@ -1,5 +1,13 @@
-import type { ShortForRuns } from '@hidewright/contract';
 import { daysBetween } from '@hidewright/domain';
+
+/** How a thing goes on, as the API says it. */
+export interface ComingOf {
+  name: string;
+  onHand: string;
+  reserved: string;
+  days: readonly { day: string; left: string }[];
+  runsOutOn: string | null;
+}
 
 export interface WeekStep {
   /** days from today */
@@ -10,7 +18,7 @@ export interface WeekStep {
 
 /** What is free today, and after every day on which something comes or goes. */
 export function weekSteps(
-  { onHand, reserved, days }: Pick<ShortForRuns, 'onHand' | 'reserved' | 'days'>,
+  { onHand, reserved, days }: Pick<ComingOf, 'onHand' | 'reserved' | 'days'>,
   today: string,
 ): WeekStep[] {
   const now = Math.max(0, Number(onHand) - Number(reserved));

@@ -1,0 +1,52 @@
+import type { OrderSuggestionReply } from '@hidewright/contract';
+import { expect, it } from 'vitest';
+import { amountText, leadWords, methodWords, soldWords, wholeWords } from './to-order-words.ts';
+
+const workshop = { areaUnit: 'ft2' } as never;
+const item = (change: object) =>
+  ({
+    of: 'hardware',
+    unit: 'piece',
+    least: null,
+    multiple: '100',
+    whole: null,
+    ...change,
+  }) as never;
+const side = { areaMm2: '2043866.88', form: 'side' };
+
+it('says quantities in their unit', () => {
+  expect(amountText('1250', { of: 'hardware', unit: 'piece' }, workshop)).toBe('1,250');
+  expect(amountText('2.54', { of: 'hardware', unit: 'm' }, workshop)).toBe('2.5 m');
+  expect(amountText('2043866.88', { of: 'leather', unit: 'mm2' }, workshop)).toBe('22 ft²');
+});
+
+it('says how it is sold, and how many sides that is', () => {
+  expect(soldWords(item({ least: '500' }), workshop)).toBe('packs of 100, at least 500');
+  expect(soldWords(item({ multiple: '1' }), workshop)).toBe('');
+  const leather = { of: 'leather', unit: 'mm2', multiple: side.areaMm2, whole: side };
+  expect(soldWords(item(leather), workshop)).toBe('whole sides of about 22 ft²');
+  expect(wholeWords('6131600.64', { whole: side })).toBe('3 sides');
+  expect(wholeWords('2043866.88', { whole: side })).toBe('1 side');
+});
+
+it('says by which method use is expected, and why', () => {
+  const usage = { periodDays: 28, series: [], idlePercent: '62.5', size: '120', interval: '3' };
+  const words = (method: string) =>
+    methodWords(
+      { usage: { ...usage, method } } as unknown as OrderSuggestionReply,
+      (value) => value,
+    );
+  expect(words('croston')).toContain('63 % of the periods are without any');
+  expect(words('croston')).toContain('at a time (120)');
+  expect(words('smoothing')).toContain('Its use is steady');
+  expect(words('too little')).toContain('not used in the last twelve months');
+});
+
+it('says who tells how long a delivery takes', () => {
+  const lead = { meanDays: '7', sdDays: '0', deliveries: 0 };
+  expect(leadWords(item({ lead, supplierName: 'Fennbridge Fittings' }))).toContain('says 7 days');
+  const took = { meanDays: '6.4', sdDays: '1.2', deliveries: 5 };
+  expect(leadWords(item({ lead: took, supplierName: 'Fennbridge Fittings' }))).toContain(
+    'The last 5 deliveries of Fennbridge Fittings took 6.4 days on average, give or take 1.2.',
+  );
+});
