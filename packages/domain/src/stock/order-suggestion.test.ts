@@ -44,6 +44,10 @@ describe('what to order', () => {
     expect(quantity).toBe('1900');
   });
 
+  it('is one pack at least where nothing asks for more', () => {
+    expect(suggest({ minimum: 0 })).toMatchObject({ state: 'fine', quantity: '0', usual: '100' });
+  });
+
   it('says what is due within two weeks', () => {
     expect(suggest({ use: steady, minimum: 0, free: 210 })).toMatchObject({
       ...{ state: 'soon', dueInDays: 14, quantity: '0', usual: '1900', usualBy: 'year' },
@@ -131,6 +135,7 @@ describe('every suggestion', () => {
         const usual = Number(orderSuggestion(input).usual);
         expect(usual % Number(input.terms.multiple)).toBe(0);
         expect(usual).toBeGreaterThanOrEqual(Number(input.terms.minimum));
+        expect(usual).toBeGreaterThan(0);
       }),
     );
   });

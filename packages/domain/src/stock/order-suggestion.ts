@@ -118,8 +118,9 @@ function usualOrder(input: OrderInput, missing: number) {
   const wanted = byHand === null ? (economic ?? 0) : Number(readDecimal(byHand, 'byHand.quantity'));
   // The 6th place keeps what floating point adds from costing a pack.
   const needed = new Exact(Math.max(wanted, missing, 0)).toDecimalPlaces(6);
+  const least = needed.isZero() ? (input.terms.multiple ?? '1') : toText(needed);
   const [buy] = bestBuy({
-    needed: toText(needed),
+    needed: least,
     pricedAmount: input.pricedAmount,
     offers: [{ ...input.terms, id: 0, leadDays: 0, preferred: true }],
   });

@@ -25,6 +25,7 @@ function standing(item: Suggested, say: Say, dueOn: string | null): string[] {
     const when = dueOn === null ? '' : ` about ${sayDay(dueOn)}`;
     return [`${have}. At ${rateWords(item, say)} it falls below ${mark}${when}.`];
   }
+  if (point === 0) return [`${have}: enough, as long as it has no minimum and little use.`];
   return [`${have}: enough. It is ordered below ${say(point)}.`];
 }
 

@@ -88,6 +88,7 @@ async function furnishRooms(work: Work): Promise<Furnished> {
       weightHighOz: new Decimal(each.weightHighOz),
       pricePerFt2: new Decimal(each.pricePerFt2),
       wholeAreaMm2: new Decimal(each.wholeAreaMm2),
+      reorderAtMm2: 'reorderAtMm2' in each ? new Decimal(each.reorderAtMm2) : null,
       supplierId: furnished.suppliers.id(supplier),
     });
     await note(work, furnished.leathers, 'leather', leather);

@@ -53,6 +53,8 @@ export const plateOffers = [
 /** 22 ft². */
 const usualSide = { wholeForm: 'side', wholeAreaMm2: '2043866.88' } as const;
 
+const [thirtyTwoFeet, sixtyFeet] = ['2972897.28', '5574182.4'];
+
 export const leathers = [
   {
     name: 'Oak tan russet 5–6 oz',
@@ -63,6 +65,7 @@ export const leathers = [
     weightHighOz: '6',
     ...usualSide,
     pricePerFt2: '9.50',
+    reorderAtMm2: sixtyFeet,
     supplier: 'Oldbeck Tannery',
   },
   {
@@ -85,6 +88,7 @@ export const leathers = [
     weightHighOz: '4',
     ...usualSide,
     pricePerFt2: '8.40',
+    reorderAtMm2: thirtyTwoFeet,
     supplier: 'Oldbeck Tannery',
   },
 ] as const satisfies { supplier: SupplierName; [field: string]: string }[];

@@ -28,7 +28,7 @@ export function Component() {
     <>
       <PageHeader
         title="To order"
-        subtitle={`${dueWords(items.length - (show === 'all' ? fine : 0))} · ${fine === 1 ? '1 thing is' : `${fine} things are`} fine`}
+        subtitle={`${countedWords(items.length - (show === 'all' ? fine : 0))} due, ${fine} fine`}
         action={
           show === 'all' ? (
             <LinkButton to="/stockroom/to-order">Only what is due</LinkButton>
@@ -55,7 +55,7 @@ export function Component() {
   );
 }
 
-const dueWords = (due: number): string =>
-  due === 0 ? 'Nothing is due' : `${due} ${due === 1 ? 'is' : 'are'} due`;
+const countedWords = (due: number): string =>
+  due === 0 ? 'Nothing is' : `${due} ${due === 1 ? 'thing is' : 'things are'}`;
 
 export const ErrorBoundary = RouteError;

@@ -33,16 +33,20 @@ export function ItemCard({ item, mayOrder, children, ...rates }: ItemCardProps) 
     >
       <p className="mb-4 max-w-prose">{item.why}</p>
       <KeyFigures figures={figuresOf(item, workshop)} />
-      {children && <div className="mt-4 border-t border-stitch pt-4">{children}</div>}
+      {children && item.state !== 'fine' && (
+        <div className="mt-4 border-t border-stitch pt-4">{children}</div>
+      )}
       <Drafts item={item} />
       <details className="mt-3">
         <summary className="min-h-11 rounded py-2.5 font-semibold">
-          {`More of ${item.name}: the coming weeks, and how it is worked out`}
+          The coming weeks, and how it is worked out
+          <span className="sr-only">: {item.name}</span>
         </summary>
         <div className="space-y-5 pt-2">
           <ComingWeeks item={item} />
           <HowWorkedOut item={item} {...rates} />
           {mayOrder && <ByHand item={item} />}
+          {item.state === 'fine' && children}
         </div>
       </details>
     </Card>

@@ -12,7 +12,8 @@ interface OrderControlsProps {
   item: OrderSuggestionReply;
   text: string;
   wrong: boolean;
-  ticked: boolean;
+  /** Undefined where there are no others to draft it with. */
+  ticked: boolean | undefined;
   busy: boolean;
   onText: (text: string) => void;
   onTick: (on: boolean) => void;
@@ -58,17 +59,19 @@ export function OrderControls(props: OrderControlsProps) {
         <Button busy={busy} onClick={onDraft}>
           Put on the draft<span className="sr-only">: {item.name}</span>
         </Button>
-        <label className="flex min-h-11 items-center gap-2.5">
-          <input
-            type="checkbox"
-            checked={ticked}
-            onChange={(event) => onTick(event.target.checked)}
-            className="size-4.5 accent-verdigris"
-          />
-          <span>
-            with the others<span className="sr-only">: {item.name}</span>
-          </span>
-        </label>
+        {ticked !== undefined && (
+          <label className="flex min-h-11 items-center gap-2.5">
+            <input
+              type="checkbox"
+              checked={ticked}
+              onChange={(event) => onTick(event.target.checked)}
+              className="size-4.5 accent-verdigris"
+            />
+            <span>
+              with the others<span className="sr-only">: {item.name}</span>
+            </span>
+          </label>
+        )}
       </div>
     </div>
   );

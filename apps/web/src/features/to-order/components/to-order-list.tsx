@@ -19,6 +19,9 @@ const groups = [
   { state: 'fine', title: 'Enough' },
 ] as const;
 
+const mayBeDrafted = ({ state, supplierId }: Item): boolean =>
+  state !== 'drafted' && supplierId !== null;
+
 const keyOf = ({ of, id, drafted }: Item): string => `${of} ${id} ${drafted}`;
 
 interface ToOrderListProps {
@@ -50,6 +53,7 @@ export function ToOrderList({ items, mayOrder, ...rates }: ToOrderListProps) {
   }
   const press = (chosen: readonly Item[]) => void draft(chosen).catch(() => undefined);
   const chosen = items.filter((item) => ticked(item));
+  const several = items.filter(mayBeDrafted).length > 1;
 
   return (
     <div className="space-y-6">
@@ -63,7 +67,7 @@ export function ToOrderList({ items, mayOrder, ...rates }: ToOrderListProps) {
             </Notice>
           )}
           {send.data && <DraftedNotice drafted={send.data} />}
-          {chosen.length > 0 && (
+          {several && chosen.length > 0 && (
             <Button tone="primary" busy={send.isPending} onClick={() => press(chosen)}>
               {chosen.length === 1
                 ? 'Draft the one that is ticked'
@@ -86,7 +90,7 @@ export function ToOrderList({ items, mayOrder, ...rates }: ToOrderListProps) {
                       item={item}
                       text={texts(item)}
                       wrong={asked.includes(keyOf(item)) && list.quantityOf(item) === undefined}
-                      ticked={ticked(item)}
+                      ticked={several ? ticked(item) : undefined}
                       busy={send.isPending}
                       onText={(text) => list.type(item, text)}
                       onTick={(on) => list.tick(item, on)}
@@ -111,11 +115,7 @@ function useTypedOrders(items: readonly Item[]) {
   const texts = (item: Item) => typed[keyOf(item)] ?? proposedText(item, workshop);
   return {
     texts,
-    ticked: (item: Item) =>
-      items.includes(item) &&
-      item.state !== 'drafted' &&
-      item.supplierId !== null &&
-      (ticks[keyOf(item)] ?? item.state === 'now'),
+    ticked: (item: Item) => mayBeDrafted(item) && (ticks[keyOf(item)] ?? item.state === 'now'),
     quantityOf: (item: Item) => readQuantity(texts(item), item, workshop),
     type: (item: Item, text: string) => setTyped({ ...typed, [keyOf(item)]: text }),
     tick: (item: Item, on: boolean) => setTicks({ ...ticks, [keyOf(item)]: on }),
