@@ -75,7 +75,7 @@ export function orderSuggestion(input: OrderInput): OrderSuggestion {
   const total = position + input.drafted;
   const { point, pointBy, workedOut } = pointOf(input);
   const daily = dailyUse(input.use);
-  const dueInDays = daily > 0 ? Math.max(0, Math.floor((total - point) / daily)) : null;
+  const dueInDays = daily > 0 ? Math.max(0, Math.floor((total - point) / daily) + 1) : null;
   const due = dueInDays !== null && dueInDays <= soonDays;
   const state =
     total < point ? 'now' : position < point ? 'drafted' : due ? 'soon' : ('fine' as const);

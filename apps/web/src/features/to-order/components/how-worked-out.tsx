@@ -26,14 +26,14 @@ export function HowWorkedOut({ item, ...rates }: HowWorkedOutProps) {
         word={`Used in ${period === 'week' ? 'a week' : 'four weeks'}`}
         figure={`${say(usage.mean)} on average, give or take ${say(usage.sd)}`}
       >
-        {`What jobs took, less what they gave back, in the last ${usage.series.length} times ${period}: their mean, and their standard deviation.`}
+        {`What jobs took, less what they gave back, in the last ${(usage.series.length * usage.periodDays) / 7} weeks: their mean, and their standard deviation.`}
       </Worked>
       <Worked
         word="Expected"
         figure={
           usage.method === 'too little'
             ? 'too little to go by'
-            : `${say(usage.forecast)} a ${period === 'week' ? 'week' : 'four weeks'}`
+            : `${say(usage.forecast)} in ${period === 'week' ? 'a week' : 'four weeks'}`
         }
       >
         {methodWords(item, say)}
