@@ -16,7 +16,6 @@ import {
 
 /** What may become of a piece that leaves the shelf. */
 const waysOut = ['sold', 'given', 'spoiled'] as const;
-export type WayOut = (typeof waysOut)[number];
 
 /** Finished pieces of one pattern that lie on the shelf, good ones and seconds apart. */
 export const finishedPiece = z
