@@ -25,7 +25,7 @@ const ledgers = fc
   .array(fc.tuple(receipt, fc.nat({ max: 100 })), { minLength: 1, maxLength: 15 })
   .map(ledgerOf);
 
-const sum = (all: readonly ValuedMovement[], of: keyof ValuedMovement) =>
+const sum = (all: readonly ValuedMovement[], of: 'quantity' | 'value') =>
   all.reduce((total, each) => total + each[of], 0);
 
 describe('layers of stock', () => {

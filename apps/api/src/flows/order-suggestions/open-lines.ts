@@ -27,7 +27,8 @@ const sql = `
     p.id AS order_id, p.number, p.state, COALESCE(l.expected_on, p.expected_on) AS expected_on,
     l.quantity - l.received AS open
   FROM purchase_order p JOIN purchase_line l ON l.purchase_order_id = p.id
-  WHERE p.state IN ('draft', 'sent', 'part received') AND l.received < l.quantity ORDER BY p.id, l.position`;
+  WHERE p.state IN ('draft', 'sent', 'part received') AND l.closed = 0
+    AND l.received < l.quantity ORDER BY p.id, l.position`;
 
 export async function readOpenLines(
   em: EntityManager,
