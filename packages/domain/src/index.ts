@@ -120,6 +120,8 @@ export * from './stock/lead-time.ts';
 export * from './stock/order-suggestion.ts';
 export * from './stock/count-outcome.ts';
 export * from './stock/label-grid.ts';
+export * from './stock/mixed-lots.ts';
+export * from './stock/offcut-area.ts';
 export * from './stock/scanned-tag.ts';
 export * from './stock/stock-cost.ts';
 export * from './stock/stock-layers.ts';
