@@ -28,6 +28,7 @@ import { lotPhotoRoutes } from './modules/lots/lot-photos.routes.ts';
 import { lotSearchRoutes } from './modules/lots/lot-searches.routes.ts';
 import { lotRoutes } from './modules/lots/lots.routes.ts';
 import { orderSuggestionRoutes } from './modules/order-suggestions/order-suggestions.routes.ts';
+import { offcutRoutes } from './modules/lots/offcuts.routes.ts';
 import { orderRoutes } from './modules/orders/orders.routes.ts';
 import { learnedRoutes } from './modules/patterns/learned.routes.ts';
 import { patternRoutes } from './modules/patterns/patterns.routes.ts';
@@ -81,6 +82,7 @@ const rooms: ((context: Context) => Router)[] = [
   jobRoutes,
   lotRoutes,
   lotPhotoRoutes,
+  offcutRoutes,
   lotSearchRoutes,
   hardwareRoutes,
   supplierRoutes,

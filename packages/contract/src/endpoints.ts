@@ -19,6 +19,7 @@ import * as lotPhotos from './lot-photos.ts';
 import * as lotSearches from './lot-searches.ts';
 import * as lots from './lots.ts';
 import * as orderSuggestions from './order-suggestions.ts';
+import * as offcuts from './offcuts.ts';
 import * as orders from './orders.ts';
 import * as patterns from './patterns.ts';
 import * as people from './people.ts';
@@ -78,6 +79,7 @@ const rooms: Record<string, unknown>[] = [
   leathers,
   lots,
   lotPhotos,
+  offcuts,
   lotSearches,
   hardware,
   suppliers,

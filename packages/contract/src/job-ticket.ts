@@ -50,6 +50,8 @@ const jobLot = z
     form: z.string(),
     shade: z.string(),
     place: z.string(),
+    widthMm: z.string().nullable(),
+    heightMm: z.string().nullable(),
     /** Still held for this job. */
     heldAreaMm2: z.string(),
     /** On hand and held by nobody. */

@@ -9,6 +9,7 @@ import { TheCounts } from './migration-20261203-the-counts.ts';
 import { TheDeliveries } from './migration-20261203-the-deliveries.ts';
 import { TheDesigns } from './migration-20261203-the-designs.ts';
 import { TheOffers } from './migration-20261203-the-offers.ts';
+import { TheFamily } from './migration-20261204-the-family.ts';
 import { TheOrdersDue } from './migration-20261204-the-orders-due.ts';
 import { TheShelf } from './migration-20261204-the-shelf.ts';
 
@@ -25,6 +26,7 @@ export const migrations = [
   { name: 'migration-20261203-the-deliveries', class: TheDeliveries },
   { name: 'migration-20261203-the-designs', class: TheDesigns },
   { name: 'migration-20261203-the-offers', class: TheOffers },
+  { name: 'migration-20261204-the-family', class: TheFamily },
   { name: 'migration-20261204-the-orders-due', class: TheOrdersDue },
   { name: 'migration-20261204-the-shelf', class: TheShelf },
 ];

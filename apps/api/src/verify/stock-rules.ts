@@ -32,8 +32,20 @@ export const stockRules: Rule[] = [
     'A lot came in with the area that it was measured at, and at its cost',
     `SELECT l.tag || ' was measured at ' || l.measured_area_mm2 || ' and received as ' || COALESCE(m.quantity, 0) AS fault
     FROM lot l LEFT JOIN (SELECT lot_id, SUM(quantity) AS quantity, SUM(value) AS value FROM stock_movement
-      WHERE kind = 'receive' GROUP BY lot_id) m ON m.lot_id = l.id
+      WHERE kind = 'receive' OR from_lot_id IS NOT NULL GROUP BY lot_id) m ON m.lot_id = l.id
     WHERE m.quantity IS NOT l.measured_area_mm2 OR m.value IS NOT l.cost`,
+  ),
+  none(
+    'An offcut came once, from the lot that it hangs on, and no other lot did',
+    `SELECT l.tag || ' hangs on lot ' || COALESCE(l.parent_id, 0) || ', its first row on ' || COALESCE(MIN(m.from_lot_id), 0) AS fault
+    FROM lot l LEFT JOIN stock_movement m ON m.lot_id = l.id AND m.from_lot_id IS NOT NULL
+    GROUP BY l.id HAVING MIN(m.from_lot_id) IS NOT l.parent_id OR COUNT(m.id) > 1`,
+  ),
+  none(
+    'No job brought back more of a lot than it took, whole or as offcuts',
+    `SELECT l.tag || ' gave a job ' || -SUM(m.quantity) || ' in all' AS fault
+    FROM stock_movement m JOIN lot l ON l.id = COALESCE(m.from_lot_id, m.lot_id)
+    WHERE m.job_id IS NOT NULL GROUP BY m.job_id, l.id HAVING SUM(m.quantity) > 0`,
   ),
   none(
     'An approved count posted each of its differences, and no other sheet posted any',

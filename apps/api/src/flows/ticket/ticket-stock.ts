@@ -18,7 +18,14 @@ interface JobStock {
 
 export async function stockOfJob(em: EntityManager, jobId: number): Promise<JobStock> {
   const reservations = await em.find(Reservation, { jobId });
-  const moved = await em.find(StockMovement, { jobId });
+  const moved = (await em.find(StockMovement, { jobId })).map(
+    ({ lotId, fromLotId, hardwareId, quantity }) => ({
+      // An offcut came out of what was taken of the lot that it was cut from.
+      lotId: fromLotId ?? lotId,
+      hardwareId,
+      quantity,
+    }),
+  );
   return {
     held: (item) => sum(reservations.filter(same(item)).map(({ open }) => open)),
     taken: (item) => -sum(moved.filter(same(item)).map(({ quantity }) => quantity)),
@@ -55,6 +62,8 @@ export async function ticketLots(
       form: lot.form,
       shade: lot.shade,
       place: lot.place,
+      widthMm: lot.widthMm?.toString() ?? null,
+      heightMm: lot.heightMm?.toString() ?? null,
       held: stock.held({ lotId: lot.id }),
       free: free.get(`lot ${lot.id}`) ?? 0,
       taken: stock.taken({ lotId: lot.id }),

@@ -26,6 +26,10 @@ export class StockMovement {
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   hardwareId: number | null = null;
 
+  /** Of an offcut's first row: the lot whose leather it is, which the job had taken. */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  fromLotId: number | null = null;
+
   /** Signed: in is positive. */
   @Property({ type: 'integer', columnType: 'integer' })
   quantity!: number;

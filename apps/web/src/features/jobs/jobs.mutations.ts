@@ -3,6 +3,7 @@ import {
   holdForJob,
   letGo,
   pauseJob,
+  putOffcutBack,
   resumeJob,
   takeForJob,
 } from '@hidewright/contract';
@@ -12,5 +13,6 @@ export const useTakeForJob = () => useSend(takeForJob);
 export const useHoldForJob = () => useSend(holdForJob);
 export const useLetGo = () => useSend(letGo);
 export const useFinishJob = () => useSend(finishJob);
+export const usePutOffcutBack = () => useSend(putOffcutBack);
 export const usePauseJob = () => useSend(pauseJob);
 export const useResumeJob = () => useSend(resumeJob);

@@ -57,7 +57,7 @@ export function FinishCard({ job }: { job: Job }) {
             key={lotId}
             name={`leatherLeft.${at}.areaMm2`}
             label={`Left of lot ${tag}`}
-            help="Goes back on the rack."
+            help="Goes back to the lot that it was taken from. What is cut off gets a tag of its own above, as an offcut."
           />
         ))}
         {hardware.map(({ hardwareId, name }, at) => (

@@ -6,9 +6,10 @@ import { EmptyState } from '../../../components/empty-state.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { say } from '../../../components/toast.ts';
 import { ApiProblem } from '../../../lib/api-problem.ts';
-import { rackAreaText, countText } from '../../../lib/formatting.ts';
+import { countText, rackAreaText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
+import { OffcutBack } from './offcut-back.tsx';
 import { TakeOther } from './take-other.tsx';
 
 interface StockCardProps {
@@ -48,6 +49,9 @@ export function StockCard({ job, canTake }: StockCardProps) {
             title={<LotTitle lot={lot} />}
             detail={lotLine(lot, (mm2) => rackAreaText(mm2, workshop))}
           >
+            {cutsOff.has(job.state) && lot.takenAreaMm2 !== '0' && (
+              <OffcutBack job={job} lot={lot} />
+            )}
             {job.state !== 'finished' && lot.heldAreaMm2 !== '0' && (
               <LetGo
                 busy={letting.isPending && letting.variables.body[lotKey] === lot.lotId}
@@ -119,6 +123,9 @@ export function StockCard({ job, canTake }: StockCardProps) {
   );
 }
 
+/** When what was taken is on the bench, and may come off it in part. */
+const cutsOff: ReadonlySet<Job['state']> = new Set(['at the bench', 'paused']);
+
 const lotKey = 'lotId' as never;
 const hardwareKey = 'hardwareId' as never;
 
@@ -151,7 +158,10 @@ function Line({
 }
 
 function LotTitle({ lot }: { lot: JobLot }) {
-  const rest = [lot.form, lot.shade, lot.place].filter((word) => word !== '').join(', ');
+  const { lengthUnit } = useWorkshop();
+  const { form, widthMm, heightMm, shade, place } = lot;
+  const size = widthMm && heightMm ? ` ${sizeText(widthMm, heightMm, lengthUnit)}` : '';
+  const rest = [form + size, shade, place].filter((word) => word !== '').join(', ');
   return (
     <>
       <strong>{lot.tag}</strong> <span className="text-ink-soft">{rest}</span>
