@@ -8,7 +8,8 @@ import { findLot } from '../modules/lots/find-lot.ts';
 import { drawTag } from '../modules/lots/lot-tags.ts';
 import { Lot } from '../modules/lots/lot.entity.ts';
 import { describeItem } from '../modules/stock/described-item.ts';
-import { costOfOffcut, returnAsOffcut } from '../modules/stock/stock-ledger.ts';
+import { returnAsOffcut } from '../modules/stock/stock-ledger.ts';
+import { costOfOffcut } from '../modules/stock/taken-by-job.ts';
 import type { Work } from '../work.ts';
 
 type Asked = BodyOf<typeof endpoint>;

@@ -9,6 +9,7 @@ import { StockBalance } from './stock-balance.entity.ts';
 import { itemOf, keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
 import { costOfComing, costOfGoing, shareOfCost } from './stock-value.ts';
+import { takenBy } from './taken-by-job.ts';
 
 /*
  * The one place that writes movements, balances and reservations: they change together, so that what is kept always
@@ -129,37 +130,23 @@ export async function returnStock(
 }
 
 interface Offcut {
+  lotId: number;
   jobId: number;
   /** The lot that the job took it from. */
   fromLotId: number;
   quantity: number;
+  /** Its share of what that cost. */
+  value: Decimal;
   reason: string;
-}
-
-/**
- * What an offcut of what a job has taken from a lot bears of its cost: its share by area, to the cent, so that the
- * job keeps the rest. All that was taken bears all of it.
- * @throws {Problem} 422 beside `areaMm2` when the job has not taken as much
- */
-export async function costOfOffcut(work: Work, asked: Omit<Offcut, 'reason'>): Promise<Decimal> {
-  const { jobId, fromLotId: lotId, quantity } = asked;
-  requireQuantity(quantity);
-  const { taken, cost } = await takenBy(work.em, { lotId }, jobId);
-  if (quantity <= taken) return shareOfCost(quantity, { of: taken, cost });
-  const { name, say } = await describeItem(work.em, { lotId });
-  const message =
-    taken === 0
-      ? `Nothing of ${name} is out for this job. Take from it first.`
-      : `This job has ${say(taken)} of ${name} out, and the offcut would be ${say(quantity)}. Measure it again.`;
-  throw invalid([{ field: taken === 0 ? 'lotId' : 'areaMm2', message }]);
 }
 
 /** Puts an offcut on the rack as a lot of its own: what the job took of the lot that it was cut from shrinks by it. */
 export async function returnAsOffcut(
   work: Work,
-  { lotId, value, ...cut }: Offcut & { lotId: number; value: Decimal },
+  { lotId, ...cut }: Offcut,
 ): Promise<StockMovement> {
-  return move(work, { lotId }, { kind: 'return', value, ...cut });
+  requireQuantity(cut.quantity);
+  return move(work, { lotId }, { kind: 'return', ...cut });
 }
 
 /** Takes a receipt out of the books again, so that it can be written at another cost: both rows stay. */
@@ -331,24 +318,6 @@ async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalan
   await refuseKit(em, item);
   const found = await em.findOne(StockBalance, keysOf(item));
   return found ?? em.create(StockBalance, { ...keysOf(item), onHand: 0, reserved: 0 });
-}
-
-/** What a job has taken and not brought back, as it was or as an offcut, and what that cost it. */
-async function takenBy(
-  em: EntityManager,
-  item: StockItem,
-  jobId: number,
-): Promise<{ taken: number; cost: Decimal }> {
-  const { lotId } = keysOf(item);
-  const own = { ...keysOf(item), fromLotId: null, kind: { $in: ['take', 'return'] as const } };
-  const moved = await em.find(StockMovement, {
-    jobId,
-    ...(lotId === null ? own : { $or: [own, { fromLotId: lotId }] }),
-  });
-  return {
-    taken: moved.reduce((sum, movement) => sum - movement.quantity, 0),
-    cost: moved.reduce((sum, movement) => sum.minus(movement.value), new Decimal(0)),
-  };
 }
 
 async function tooLittle(work: Work, item: StockItem, asked: number, most: number) {

@@ -1,6 +1,7 @@
 import { Decimal } from 'decimal.js';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { finishJob } from '../../flows/finish-job.ts';
+import { putOffcutBack } from '../../flows/put-offcut-back.ts';
 import { logBench } from '../../flows/log-bench.ts';
 import { takeForJob } from '../../flows/take-for-job.ts';
 import { stepsOf } from '../../modules/jobs/find-job.ts';
@@ -8,6 +9,7 @@ import { Job } from '../../modules/jobs/job.entity.ts';
 import type { JobStep } from '../../modules/jobs/job-step.entity.ts';
 import { piecesSpoiled, stepLimits } from '../../modules/jobs/step-limits.ts';
 import { Reservation } from '../../modules/stock/reservation.entity.ts';
+import { StockMovement } from '../../modules/stock/stock-movement.entity.ts';
 import type { Work } from '../../work.ts';
 import type { Played, Stage } from './stage.ts';
 import type { DemoRun } from './scenario/runs.ts';
@@ -27,6 +29,7 @@ export function planWork({ shop, year }: Stage, played: Played): void {
   at(1, '11:30', (work, job) => workSteps(work, job, run, 2, 3));
   at(1, '15:45', (work, job) => workSteps(work, job, run, 3, 4));
   at(2, '11:10', (work, job) => workSteps(work, job, run, 4, 99));
+  at(2, '11:30', (work, job) => bringOffcut(work, job, run));
   at(2, '11:40', (work, job) => finish(work, job, run));
 }
 
@@ -77,6 +80,18 @@ function spoiledAt(step: JobStep, limit: number, run: DemoRun): number {
 
 const minutesOf = (step: JobStep, run: DemoRun) =>
   step.plannedMinutes.times(run.slower).toDecimalPlaces(0, Decimal.ROUND_HALF_UP).toString();
+
+/** What is left of the first lot that it took from goes to the bin for offcuts. */
+async function bringOffcut(work: Work, job: Job, { offcut }: DemoRun): Promise<void> {
+  if (offcut === undefined) return;
+  const taken = await work.em.findOneOrFail(
+    StockMovement,
+    { jobId: job.id, lotId: { $ne: null } },
+    { orderBy: { id: 'asc' } },
+  );
+  const lotId = taken.lotId ?? 0;
+  await putOffcutBack(work, job.id, { lotId, ...offcut, areaMm2: null, place: 'offcut bin' });
+}
 
 /** What was ordered and a few over; one piece in fifty passes as a second. */
 async function finish(work: Work, job: Job, run: DemoRun): Promise<void> {

@@ -36,6 +36,8 @@ export interface DemoRun {
   /** Fact over estimate, for minutes and for rejects. */
   slower: number;
   spoiled: number;
+  /** What goes back of its leather, in mm. */
+  offcut?: { widthMm: string; heightMm: string };
   /** Days from invoice to payment. */
   paidAfter?: number;
   method?: 'bank' | 'card' | 'cash' | 'cheque';
@@ -345,6 +347,7 @@ export const runs: DemoRun[] = [
     typed: '23',
     slower: 1.05,
     spoiled: 0.9,
+    offcut: { widthMm: '420', heightMm: '260' },
   },
   {
     daysBefore: 33,
@@ -357,6 +360,7 @@ export const runs: DemoRun[] = [
     fate: 'shipped',
     slower: 1,
     spoiled: 0.9,
+    offcut: { widthMm: '300', heightMm: '180' },
   },
   {
     daysBefore: 27,
