@@ -24,6 +24,7 @@ import { labelRoutes } from './modules/labels/labels.routes.ts';
 import { layoutRoutes } from './modules/layouts/layouts.routes.ts';
 import { leatherRoutes } from './modules/leathers/leathers.routes.ts';
 import { linkRoutes } from './modules/links/links.routes.ts';
+import { lotFamilyRoutes } from './modules/lots/lot-family.routes.ts';
 import { lotPhotoRoutes } from './modules/lots/lot-photos.routes.ts';
 import { lotSearchRoutes } from './modules/lots/lot-searches.routes.ts';
 import { lotRoutes } from './modules/lots/lots.routes.ts';
@@ -83,6 +84,7 @@ const rooms: ((context: Context) => Router)[] = [
   lotRoutes,
   lotPhotoRoutes,
   offcutRoutes,
+  lotFamilyRoutes,
   lotSearchRoutes,
   hardwareRoutes,
   supplierRoutes,

@@ -15,6 +15,7 @@ import * as layouts from './layouts.ts';
 import * as learned from './learned.ts';
 import * as leathers from './leathers.ts';
 import * as links from './links.ts';
+import * as lotFamily from './lot-family.ts';
 import * as lotPhotos from './lot-photos.ts';
 import * as lotSearches from './lot-searches.ts';
 import * as lots from './lots.ts';
@@ -80,6 +81,7 @@ const rooms: Record<string, unknown>[] = [
   lots,
   lotPhotos,
   offcuts,
+  lotFamily,
   lotSearches,
   hardware,
   suppliers,

@@ -21,6 +21,7 @@ export * from './layouts.ts';
 export * from './learned.ts';
 export * from './leathers.ts';
 export * from './links.ts';
+export * from './lot-family.ts';
 export * from './lot-photos.ts';
 export * from './lot-searches.ts';
 export * from './lots.ts';

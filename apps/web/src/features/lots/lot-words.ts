@@ -16,3 +16,12 @@ export function formText(
 function pluralOf(form: Lot['form']): string {
   return form === 'belly' ? 'bellies' : `${form}s`;
 }
+
+/** How many cuts lie between a lot and the one that came in. */
+export function depthOf(
+  lots: readonly { lotId: number; parentId: number | null }[],
+  lotId: number,
+): number {
+  const parentId = lots.find((lot) => lot.lotId === lotId)?.parentId ?? null;
+  return parentId === null ? 0 : 1 + depthOf(lots, parentId);
+}

@@ -17,6 +17,7 @@ import { WaitingMark } from '../../../features/jobs/components/waiting-mark.tsx'
 import { WhyItDiffers } from '../../../features/jobs/components/why-it-differs.tsx';
 import { comparisonQuery, jobQuery } from '../../../features/jobs/jobs.queries.ts';
 import { useLogOutbox } from '../../../features/jobs/use-log-outbox.ts';
+import { CutFromCard } from '../../../features/lots/components/cut-from-card.tsx';
 import { ShipForm } from '../../../features/orders/components/ship-form.tsx';
 import { LearnedCard } from '../../../features/patterns/components/learned-card.tsx';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
@@ -62,6 +63,11 @@ export function Component() {
             </div>
           )}
           <StockCard job={job} canTake={canLog} />
+          {job.lots.some(({ takenAreaMm2 }) => takenAreaMm2 !== '0') && (
+            <div className="print:hidden">
+              <CutFromCard orderId={job.orderId} mayOpenOrders />
+            </div>
+          )}
           {canLog && (
             <div className="print:hidden">
               <FinishCard key={finishKey(job)} job={job} />

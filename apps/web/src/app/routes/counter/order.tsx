@@ -7,6 +7,7 @@ import { LinkButton } from '../../../components/link-button.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
+import { CutFromCard } from '../../../features/lots/components/cut-from-card.tsx';
 import { Arrivals } from '../../../features/orders/components/arrivals.tsx';
 import { OrderFigures } from '../../../features/orders/components/order-figures.tsx';
 import { OrderTicket } from '../../../features/orders/components/order-ticket.tsx';
@@ -31,6 +32,7 @@ export function Component() {
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <Arrivals order={order} canNote={role === 'owner'} />
         <JobCard order={order} canOpen={role !== 'bookkeeper'} />
+        <CutFromCard orderId={order.id} mayOpenOrders={role !== 'bookkeeper'} />
         <OrderFigures order={order} />
         {order.state === 'packed' && role !== 'bookkeeper' && <ShipForm order={order} />}
         <Card title="Where it comes from">

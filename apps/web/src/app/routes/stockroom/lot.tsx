@@ -8,6 +8,7 @@ import { PageTitle } from '../../../components/page-title.tsx';
 import { Ticket } from '../../../components/ticket.tsx';
 import { ChangeLotForm } from '../../../features/lots/components/change-lot-form.tsx';
 import { patternsQuery } from '../../../features/patterns/patterns.queries.ts';
+import { FamilyCard } from '../../../features/lots/components/family-card.tsx';
 import { LotFacts } from '../../../features/lots/components/lot-facts.tsx';
 import { LayOnLot } from '../../../features/lots/components/lay-on-lot.tsx';
 import { SideCard } from '../../../features/lots/components/side-card.tsx';
@@ -63,6 +64,7 @@ export function Component() {
             <WhatItGives lotId={lot.id} leatherName={lot.leatherName} />
           </>
         )}
+        <FamilyCard lotId={id} handlesStock={handlesStock} />
         <Card title="Movements">
           <MovementsTable item={item} />
         </Card>
