@@ -58,6 +58,8 @@ const jobLot = z
     freeAreaMm2: z.string(),
     /** Taken for this job, less what came back. */
     takenAreaMm2: z.string(),
+    /** What would mix with the leather that the order has already; null where nothing does. */
+    mix: z.object({ of: z.enum(['shades', 'lots']), sentence: z.string() }).nullable(),
   })
   .meta({ id: 'JobLot' });
 export type JobLot = z.infer<typeof jobLot>;

@@ -6,6 +6,7 @@ import { Lot } from '../../modules/lots/lot.entity.ts';
 import { Reservation } from '../../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../../modules/stock/stock-movement.entity.ts';
+import { mixesOf } from './lot-mixes.ts';
 
 type Keyed = { lotId: number | null; hardwareId: number | null };
 
@@ -55,7 +56,7 @@ export async function ticketLots(
     { orderBy: { id: 'asc' } },
   );
   const free = await freeByItem(em, { lotId: { $in: lots.map(({ id }) => id) } });
-  return lots
+  const rows = lots
     .map((lot) => ({
       lotId: lot.id,
       tag: lot.tag,
@@ -69,13 +70,15 @@ export async function ticketLots(
       taken: stock.taken({ lotId: lot.id }),
     }))
     .filter(({ held, free, taken }) => held > 0 || free > 0 || taken > 0)
-    .sort((a, b) => b.held - a.held || b.taken - a.taken)
-    .map(({ held, free, taken, ...lot }) => ({
-      ...lot,
-      heldAreaMm2: areaText(held),
-      freeAreaMm2: areaText(free),
-      takenAreaMm2: areaText(taken),
-    }));
+    .sort((a, b) => b.held - a.held || b.taken - a.taken);
+  const mixes = await mixesOf(em, rows);
+  return rows.map(({ held, free, taken, ...lot }) => ({
+    ...lot,
+    heldAreaMm2: areaText(held),
+    freeAreaMm2: areaText(free),
+    takenAreaMm2: areaText(taken),
+    mix: mixes.get(lot.lotId) ?? null,
+  }));
 }
 
 /** The hardware that the pattern asks for, and whatever else was taken. */

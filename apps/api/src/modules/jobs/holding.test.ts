@@ -47,3 +47,38 @@ describe('stock held for a job by hand', () => {
     await post('reservations', { hardwareId: ready.hardwareId, quantity: 1 }).expect(409);
   });
 });
+
+describe('leather that would mix in one order', () => {
+  it('is warned of on the ticket, names the shades, and may be held all the same', async () => {
+    const owner = ready.shop.as('owner');
+    const side = { leatherId: ready.leatherId, form: 'side', measuredAreaMm2: '900000' };
+    const lots = [
+      { ...side, tag: 'OT-200', shade: 'dark tan' },
+      { ...side, tag: 'OT-201', shade: 'mid tan' },
+      { ...side, tag: 'OT-202' },
+    ].map((lot) => ({ ...lot, cost: '90.00' }));
+    const hardware = [{ hardwareId: ready.hardwareId, quantity: 300, cost: '51.00' }];
+    await owner.post('/api/receipts').send({ lots, hardware }).expect(201);
+    const order = await takenOn(ready);
+    ticket = await ticketOf(ready, order);
+    for (const { lotId, heldAreaMm2 } of ticket.lots)
+      if (heldAreaMm2 !== '0') await post('releases', { lotId }).expect(201);
+    ticket = await ticketOf(ready, order);
+    expect(ticket.lots.map(({ mix }) => mix)).toEqual(ticket.lots.map(() => null));
+
+    const named = (tag: string) => ticket.lots.find((each) => each.tag === tag);
+    const hold = async (tag: string) => {
+      const body = { lotId: named(tag)?.lotId, areaMm2: '1000' };
+      ticket = (await post('reservations', body).expect(201)).body as Job;
+    };
+    await hold('OT-200');
+    expect(named('OT-200')?.mix).toBeNull();
+    expect(named('OT-201')?.mix?.of).toBe('shades');
+    expect(named('OT-201')?.mix?.sentence).toContain(
+      'OT-201 is mid tan, and this order has OT-200 (dark tan)',
+    );
+    expect(named('OT-202')?.mix?.of).toBe('lots');
+    await hold('OT-201');
+    expect(named('OT-200')?.mix?.of).toBe('shades');
+  });
+});

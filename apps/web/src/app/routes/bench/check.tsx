@@ -4,6 +4,7 @@ import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { CanWeMakeIt } from '../../../features/checks/components/can-we-make-it.tsx';
+import { LastTimeCard } from '../../../features/lots/components/last-time-card.tsx';
 import { quoteQuery } from '../../../features/quotes/quotes.queries.ts';
 import { countText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
@@ -23,7 +24,8 @@ export function Component() {
         title={quote.title}
         subtitle={`${quote.number}: ${quantity}for ${quote.customerName}`}
       />
-      <div className="max-w-3xl">
+      <div className="max-w-3xl space-y-5">
+        <LastTimeCard of="quote" id={quote.id} />
         <CanWeMakeIt quoteId={quote.id} by={quote.inHandsOn ?? undefined} />
       </div>
     </>

@@ -18,6 +18,7 @@ import { WhyItDiffers } from '../../../features/jobs/components/why-it-differs.t
 import { comparisonQuery, jobQuery } from '../../../features/jobs/jobs.queries.ts';
 import { useLogOutbox } from '../../../features/jobs/use-log-outbox.ts';
 import { CutFromCard } from '../../../features/lots/components/cut-from-card.tsx';
+import { LastTimeCard } from '../../../features/lots/components/last-time-card.tsx';
 import { ShipForm } from '../../../features/orders/components/ship-form.tsx';
 import { LearnedCard } from '../../../features/patterns/components/learned-card.tsx';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
@@ -60,6 +61,11 @@ export function Component() {
           {job.orderState === 'packed' && (
             <div className="print:hidden">
               <ShipForm order={{ id: job.orderId, number: job.orderNumber }} />
+            </div>
+          )}
+          {job.state !== 'finished' && (
+            <div className="empty:hidden print:hidden">
+              <LastTimeCard of="order" id={job.orderId} />
             </div>
           )}
           <StockCard job={job} canTake={canLog} />

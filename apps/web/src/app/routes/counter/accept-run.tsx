@@ -4,7 +4,9 @@ import { Card } from '../../../components/card.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { say } from '../../../components/toast.ts';
 import { CanWeMakeIt } from '../../../features/checks/components/can-we-make-it.tsx';
+import { LastTimeCard } from '../../../features/lots/components/last-time-card.tsx';
 import { TakeOnForm } from '../../../features/orders/components/take-on-form.tsx';
+import { classNames } from '../../../lib/class-names.ts';
 
 interface AcceptRunProps {
   quote: Quote;
@@ -31,7 +33,8 @@ export function AcceptRun({ quote, quantity, option, className }: AcceptRunProps
   }
   if (state !== 'draft' && state !== 'sent' && state !== 'agreed') return null;
   return (
-    <div className={className}>
+    <div className={classNames('space-y-5', className)}>
+      <LastTimeCard of="quote" id={quote.id} />
       <CanWeMakeIt
         key={option}
         quoteId={quote.id}

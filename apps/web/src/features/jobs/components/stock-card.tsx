@@ -9,6 +9,7 @@ import { ApiProblem } from '../../../lib/api-problem.ts';
 import { countText, rackAreaText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
+import { MixNotice } from './mix-notice.tsx';
 import { OffcutBack } from './offcut-back.tsx';
 import { TakeOther } from './take-other.tsx';
 
@@ -49,6 +50,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
             title={<LotTitle lot={lot} />}
             detail={lotLine(lot, (mm2) => rackAreaText(mm2, workshop))}
           >
+            {canTake && lot.heldAreaMm2 !== '0' && <MixNotice lot={lot} />}
             {cutsOff.has(job.state) && lot.takenAreaMm2 !== '0' && (
               <OffcutBack job={job} lot={lot} />
             )}

@@ -1,5 +1,6 @@
 import { takeForJob, type Job } from '@hidewright/contract';
 import { useState } from 'react';
+import { useWatch } from 'react-hook-form';
 import { z } from 'zod';
 import { AreaField } from '../../../components/area-field.tsx';
 import { Button } from '../../../components/button.tsx';
@@ -11,6 +12,7 @@ import { say } from '../../../components/toast.ts';
 import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useHoldForJob, useTakeForJob } from '../jobs.mutations.ts';
+import { MixNotice } from './mix-notice.tsx';
 
 const does = {
   take: { leather: 'Take leather', hardware: 'Take hardware', submit: 'Take it' },
@@ -100,9 +102,16 @@ function MoveLeather(props: MoveProps) {
       submitSize="bench"
     >
       <SelectField name="lotId" label="Lot" choices={choices} />
+      <ChosenMix job={job} />
       <AreaField name="areaMm2" label="How much" />
     </Form>
   );
+}
+
+/** Of the lot that is chosen just now. */
+function ChosenMix({ job }: { job: Job }) {
+  const chosen = Number(useWatch({ name: 'lotId' }));
+  return <MixNotice lot={job.lots.find(({ lotId }) => lotId === chosen)} />;
 }
 
 function MoveHardware(props: MoveProps) {
