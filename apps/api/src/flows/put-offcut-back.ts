@@ -25,7 +25,8 @@ export async function putOffcutBack(work: Work, jobId: number, asked: Asked): Pr
   const from = await findLot(work.em, asked.lotId);
   const areaMm2 = new Decimal(offcutAreaMm2(asked));
   const cut = { jobId, fromLotId: from.id, quantity: scaled(areaMm2, 3) };
-  const value = await costOfOffcut(work, cut);
+  const field = asked.areaMm2 === null ? 'widthMm' : 'areaMm2';
+  const value = await costOfOffcut(work, { ...cut, field });
   const offcut = await hang(work, from, asked, { areaMm2, cost: value });
   const reason = `offcut of ${from.tag} from ${job.number}`;
   await returnAsOffcut(work, { ...cut, lotId: offcut.id, value, reason });

@@ -94,6 +94,21 @@ describe('verifying a data folder', () => {
     ],
     ['a lot’s cost', 'UPDATE lot SET cost = cost + 1 WHERE id = 1', 'at its cost'],
     [
+      'an offcut’s cost',
+      'UPDATE lot SET cost = cost - 1 WHERE id = (SELECT MIN(id) FROM lot WHERE parent_id IS NOT NULL)',
+      'at its cost',
+    ],
+    [
+      'the lot that an offcut hangs on',
+      'UPDATE lot SET parent_id = id + 1 WHERE id = (SELECT MIN(id) FROM lot WHERE parent_id IS NOT NULL)',
+      'from the lot that it hangs on',
+    ],
+    [
+      'a job that brought back more than it took',
+      `UPDATE stock_movement SET quantity = 99999999999 WHERE from_lot_id IS NOT NULL`,
+      'brought back more of a lot than it took',
+    ],
+    [
       'what came on an order line',
       'UPDATE purchase_line SET received = received - 1 WHERE received > 0',
       'what came on it',

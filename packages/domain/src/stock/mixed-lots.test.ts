@@ -23,9 +23,9 @@ describe('lots that would mix in an order', () => {
 
   it('names the other side where shades agree or nobody noted them', () => {
     expect(mixedWith(lot(1, 'tan'), [lot(2, 'tan')])).toMatchObject({ of: 'lots' });
-    expect(mixedWith(lot(1, 'tan'), [lot(2, 'tan')])?.sentence).toContain('both are noted as tan');
+    expect(mixedWith(lot(1, 'tan'), [lot(2, 'tan')])?.sentence).toContain('Both are noted as tan');
     expect(mixedWith(lot(1), [lot(2, 'tan'), lot(3)])?.sentence).toMatch(
-      /^Another side than T-2 and T-3/,
+      /^T-1 is another side than T-2 and T-3/,
     );
     expect(mixedWith(lot(1, 'tan'), [lot(2)])?.sentence).toContain('not all noted');
   });

@@ -35,8 +35,10 @@ function ofShades(lot: LotOfOrder, unlike: readonly LotOfOrder[]): string {
 function ofLots(lot: LotOfOrder, foreign: readonly LotOfOrder[]): string {
   const others = list(foreign.map(({ tag }) => tag));
   const alike = lot.shade !== '' && foreign.every(({ shade }) => shade === lot.shade);
-  const known = alike ? `both are noted as ${lot.shade}, but` : 'the shades are not all noted:';
-  return `Another side than ${others}, which this order has; ${known} lay them side by side before you cut.`;
+  const known = alike
+    ? `${foreign.length > 1 ? 'All' : 'Both'} are noted as ${lot.shade}; still lay`
+    : 'Their shades are not all noted: lay';
+  return `${lot.tag} is another side than ${others}, which this order has. ${known} them side by side before you cut.`;
 }
 
 function list(words: readonly string[]): string {

@@ -12,6 +12,8 @@ interface Cut {
   fromLotId: number;
   /** Thousandths of mm², above 0. */
   quantity: number;
+  /** Beside which its size was typed. */
+  field: string;
 }
 
 /** What a job has taken and not brought back, as it was or as an offcut, and what that cost it. */
@@ -35,7 +37,7 @@ export async function takenBy(
 /**
  * What an offcut of what a job has taken from a lot bears of its cost: its share by area, to the cent, so that the
  * job keeps the rest. All that was taken bears all of it.
- * @throws {Problem} 422 beside `areaMm2` when the job has not taken as much
+ * @throws {Problem} 422 beside the size when the job has not taken as much
  */
 export async function costOfOffcut(work: Work, asked: Cut): Promise<Decimal> {
   const { jobId, fromLotId: lotId, quantity } = asked;
@@ -46,6 +48,6 @@ export async function costOfOffcut(work: Work, asked: Cut): Promise<Decimal> {
     taken === 0
       ? `Nothing of ${name} is out for this job. Take from it first.`
       : `This job has ${say(taken)} of ${name} out, and the offcut would be ${say(quantity)}. Measure it again.`;
-  throw invalid([{ field: taken === 0 ? 'lotId' : 'areaMm2', message }]);
+  throw invalid([{ field: taken === 0 ? 'lotId' : asked.field, message }]);
 }
 

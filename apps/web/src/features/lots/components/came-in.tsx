@@ -20,7 +20,10 @@ export function CameIn({ origin, mayOpenOrders }: CameInProps) {
       {purchaseOrderId !== null && ' on '}
       {purchaseOrderId !== null &&
         (mayOpenOrders ? (
-          <TextLink to={`/stockroom/purchase-orders/${purchaseOrderId}`}>
+          <TextLink
+            className="whitespace-nowrap"
+            to={`/stockroom/purchase-orders/${purchaseOrderId}`}
+          >
             {purchaseOrderNumber}
           </TextLink>
         ) : (

@@ -53,7 +53,6 @@ export function FamilyCard({ lotId, handlesStock }: FamilyCardProps) {
 function Member({ lot, isThis }: { lot: FamilyMember; isThis: boolean }) {
   const { areaUnit } = useWorkshop();
   const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
-  const left = lot.onHandAreaMm2 === '0' ? 'used up' : `${area(lot.onHandAreaMm2)} left`;
   const words = [lot.form, lot.shade, lot.place].filter((word) => word !== '').join(', ');
   return (
     <div className="flex flex-wrap items-center justify-between gap-x-4">
@@ -65,11 +64,18 @@ function Member({ lot, isThis }: { lot: FamilyMember; isThis: boolean }) {
         )}{' '}
         <span className="text-ink-soft">{isThis ? `this lot, ${words}` : words}</span>
       </span>
-      <span className="text-sm">
-        {area(lot.measuredAreaMm2)} measured, {left}
-      </span>
+      <span className="text-sm">{leftOf(lot, area)}</span>
     </div>
   );
+}
+
+function leftOf(
+  { onHandAreaMm2, measuredAreaMm2 }: FamilyMember,
+  area: (areaMm2: string) => string,
+): string {
+  if (onHandAreaMm2 === '0') return `${area(measuredAreaMm2)}, used up`;
+  if (onHandAreaMm2 === measuredAreaMm2) return `${area(measuredAreaMm2)}, all there`;
+  return `${area(measuredAreaMm2)}, ${area(onHandAreaMm2)} left`;
 }
 
 interface UseProps {
