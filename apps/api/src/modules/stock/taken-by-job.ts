@@ -50,4 +50,3 @@ export async function costOfOffcut(work: Work, asked: Cut): Promise<Decimal> {
       : `This job has ${say(taken)} of ${name} out, and the offcut would be ${say(quantity)}. Measure it again.`;
   throw invalid([{ field: taken === 0 ? 'lotId' : asked.field, message }]);
 }
-
