@@ -35,7 +35,7 @@ interface ToOrderListProps {
 
 /** What is due, by how much it presses; the owner ticks, changes quantities and drafts. */
 export function ToOrderList({ items, mayOrder, ...rates }: ToOrderListProps) {
-  const { texts, ticked, ...list } = useTypedOrders(items);
+  const { texts, ticked, ...list } = useTypedOrders();
   const send = useDraftSuggested();
   const [asked, setAsked] = useState<readonly string[]>([]);
 
@@ -108,7 +108,7 @@ export function ToOrderList({ items, mayOrder, ...rates }: ToOrderListProps) {
 }
 
 /** What was typed and ticked; what is due now and can be ordered is ticked from the start. */
-function useTypedOrders(items: readonly Item[]) {
+function useTypedOrders() {
   const workshop = useWorkshop();
   const [typed, setTyped] = useState<Readonly<Record<string, string>>>({});
   const [ticks, setTicks] = useState<Readonly<Record<string, boolean>>>({});
