@@ -41,11 +41,11 @@ walk('the owner sees why, changes a quantity, drafts it and sends the order', as
   const card = page.getByRole('region', { name: buckles, exact: true });
   const field = card.getByLabel(`Order of ${buckles}`);
   await field.fill('none');
-  await card.getByRole('button', { name: `Put on the draft: ${buckles}` }).click();
+  await card.getByRole('button', { name: /^Put on the draft/ }).click();
   await card.getByText('Enter a quantity above 0.').waitFor();
   await expectAccessible(page);
   await field.fill('150');
-  await card.getByRole('button', { name: `Put on the draft: ${buckles}` }).click();
+  await card.getByRole('button', { name: /^Put on the draft/ }).click();
   await page.getByText('On the draft, not sent yet:').waitFor();
   await card.getByText('What is on draft').waitFor();
   await card.getByText(', not sent yet.').waitFor();
@@ -69,7 +69,7 @@ walk('the owner sets by hand when a thing is ordered, and lets it go again', asy
   const snaps = 'Snaps, line 20, brass';
   const card = page.getByRole('region', { name: snaps, exact: true });
   await card.getByText('The coming weeks, and how it is worked out').click();
-  await card.getByRole('button', { name: `Set by hand: ${snaps}` }).click();
+  await card.getByRole('button', { name: /^Set by hand/ }).click();
   const dialog = page.getByRole('dialog');
   await dialog.getByLabel(/^Order below/).fill('3000');
   await dialog.getByLabel(/^So many at a time/).fill('950');
@@ -78,7 +78,7 @@ walk('the owner sets by hand when a thing is ordered, and lets it go again', asy
   await card.getByText(/below the 3,000 set by hand\. Order 1,000, as set by hand\./).waitFor();
   await card.getByText('The coming weeks, and how it is worked out').click();
   await card.getByText('Set by hand: order below 3,000, 950 at a time.').waitFor();
-  await card.getByRole('button', { name: `Let it go: ${snaps}` }).click();
+  await card.getByRole('button', { name: /^Let it go/ }).click();
   await card.getByText(/free: enough\. It is ordered below 300\./).waitFor();
 });
 
