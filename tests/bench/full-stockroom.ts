@@ -1,7 +1,7 @@
 import type { RawDatabase } from './raw-database.ts';
 import type { Caller } from './caller.ts';
 
-export const full = { items: 5_000, lots: 20_000, movements: 500_000 };
+const full = { items: 5_000, lots: 20_000, movements: 500_000 };
 
 /** A shop with five patterns that can be made: each of a leather and three kinds of hardware, all on hand. */
 export async function furnish(call: Caller): Promise<number[]> {

@@ -36,11 +36,16 @@ const ones = reads.filter((endpoint) => endpoint.path.includes('{id}') && asIs(e
 /** Names of fields that tell a price, a cost or a margin. */
 const telling = /price|cost|margin|wage|total|charge|amount|target|earn|^left|^owed|paid|iban/i;
 
+/** What is left of stock on a coming day, in pieces or mm²: no money. */
+const ofStock = '.days.left';
+
 function tellingFields(value: unknown, at = ''): string[] {
   if (Array.isArray(value)) return value.flatMap((item) => tellingFields(item, at));
   if (typeof value !== 'object' || value === null) return [];
   return Object.entries(value).flatMap(([name, inner]) => {
-    const here = telling.test(name) && inner !== null ? [`${at}.${name}`] : [];
+    const field = `${at}.${name}`;
+    const tells = telling.test(name) && inner !== null && !field.endsWith(ofStock);
+    const here = tells ? [field] : [];
     return [...here, ...tellingFields(inner, `${at}.${name}`)];
   });
 }

@@ -35,7 +35,7 @@ export async function readOnOrder(
   { leatherIds, hardwareIds }: Wanted,
 ): Promise<(item: Item) => OnOrder> {
   const rows = await em.execute<LineRow[]>(
-    `SELECT l.leather_id, l.hardware_id, p.number, p.state, p.expected_on, l.quantity - l.received AS open
+    `SELECT l.leather_id, l.hardware_id, p.number, p.state, COALESCE(l.expected_on, p.expected_on) AS expected_on, l.quantity - l.received AS open
     FROM purchase_order p JOIN purchase_line l ON l.purchase_order_id = p.id
     WHERE p.state IN ('draft', 'sent', 'part received') AND l.received < l.quantity AND l.closed = 0
       AND (l.leather_id IN (SELECT value FROM json_each(?)) OR l.hardware_id IN (SELECT value FROM json_each(?)))

@@ -1,10 +1,10 @@
-import { Decimal } from 'decimal.js';
+import type { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { describeItem } from './described-item.ts';
-import { refuseKit } from './refuse-kit.ts';
 import { Reservation } from './reservation.entity.ts';
+import { balanceOf, move } from './stock-rows.ts';
 import { StockBalance } from './stock-balance.entity.ts';
 import { itemOf, keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
@@ -286,38 +286,6 @@ async function useHeld(em: EntityManager, held: Reservation[], quantity: number)
     reservation.open -= used;
     left -= used;
   }
-}
-
-interface Movement {
-  kind: StockMovement['kind'];
-  quantity: number;
-  value: Decimal;
-  jobId?: number | null;
-  purchaseOrderId?: number | null;
-  fromLotId?: number;
-  reason: string;
-}
-
-/** A movement and its balance, in one flush. */
-async function move(work: Work, item: StockItem, movement: Movement): Promise<StockMovement> {
-  const balance = await balanceOf(work.em, item);
-  balance.onHand += movement.quantity;
-  const row = work.em.create(StockMovement, {
-    ...movement,
-    ...keysOf(item),
-    at: work.now.toISOString(),
-    day: work.today,
-    actorId: work.actor.id,
-    actorName: work.actor.name,
-  });
-  await work.em.flush();
-  return row;
-}
-
-async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalance> {
-  await refuseKit(em, item);
-  const found = await em.findOne(StockBalance, keysOf(item));
-  return found ?? em.create(StockBalance, { ...keysOf(item), onHand: 0, reserved: 0 });
 }
 
 async function tooLittle(work: Work, item: StockItem, asked: number, most: number) {

@@ -24,9 +24,11 @@ export function orderLeatherQuery(id: number) {
 
 /** What this customer's run of the same pattern before this one was cut from. */
 export function lastTimeQuery({ of, id }: { of: 'order' | 'quote'; id: number }) {
-  const endpoint = of === 'order' ? readLastTimeOfOrder : readLastTimeOfQuote;
   return queryOptions({
     queryKey: [of === 'order' ? 'orders' : 'quotes', id, 'last-time'],
-    queryFn: ({ signal }) => call(endpoint, { params: { id }, signal }),
+    queryFn: ({ signal }) =>
+      of === 'order'
+        ? call(readLastTimeOfOrder, { params: { id }, signal })
+        : call(readLastTimeOfQuote, { params: { id }, signal }),
   });
 }

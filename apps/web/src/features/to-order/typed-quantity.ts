@@ -5,7 +5,7 @@ import type { Workshop } from '../../lib/workshop.tsx';
 type Item = Pick<OrderSuggestionReply, 'of' | 'unit' | 'quantity' | 'usual'>;
 
 /** What would be ordered, unless something else is typed. */
-export const proposed = ({ quantity, usual }: Item): string =>
+const proposed = ({ quantity, usual }: Item): string =>
   quantity === '0' ? usual : quantity;
 
 /** The same as it stands in the field. */
