@@ -5,8 +5,7 @@ import type { Workshop } from '../../lib/workshop.tsx';
 type Item = Pick<OrderSuggestionReply, 'of' | 'unit' | 'quantity' | 'usual'>;
 
 /** What would be ordered, unless something else is typed. */
-const proposed = ({ quantity, usual }: Item): string =>
-  quantity === '0' ? usual : quantity;
+const proposed = ({ quantity, usual }: Item): string => (quantity === '0' ? usual : quantity);
 
 /** The same as it stands in the field. */
 export function proposedText(item: Item, { areaUnit }: Workshop): string {
