@@ -39,9 +39,9 @@ async function leave(page: Page): Promise<void> {
 }
 
 /** By keyboard alone everywhere; by mouse as well where there is time for both. */
-const hands = process.env['CI'] === 'true' ? [keyboardAlone] : [mouse, keyboardAlone];
+const ways = process.env['CI'] === 'true' ? [keyboardAlone] : [mouse, keyboardAlone];
 
-walk.for(hands)(
+walk.for(ways)(
   'one run of coasters, from the enquiry to the locked sales sheet, by $name',
   async (by) => {
     hands = by;
