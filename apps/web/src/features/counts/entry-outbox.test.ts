@@ -1,6 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import type { ApiProblem } from '../../lib/api-problem.ts';
-import { putEntry, sendWaitingEntries, waitingEntries } from './entry-outbox.ts';
+import { entryOutbox, putEntry } from './entry-outbox.ts';
 
 const line = { id: 7 };
 const asked: { address: string; body: unknown }[] = [];
@@ -22,7 +22,7 @@ const refuse = (status: number) =>
 
 async function send() {
   const refused: ApiProblem[] = [];
-  await sendWaitingEntries('maker@example.com', {
+  await entryOutbox.send('maker@example.com', {
     onSent: () => undefined,
     onRefused: (_, problem) => refused.push(problem),
   });
@@ -37,15 +37,15 @@ describe('what was counted on a phone', () => {
     putEntry({ ...entry, person: 'owner@example.com', entry: { quantity: 9 } });
     answer = () => Promise.reject(new TypeError('no network'));
     await send();
-    expect(waitingEntries()).toHaveLength(2);
+    expect(entryOutbox.waiting()).toHaveLength(2);
     answer = () => refuse(503);
     await send();
-    expect(waitingEntries()).toHaveLength(2);
+    expect(entryOutbox.waiting()).toHaveLength(2);
     expect(asked.map(({ body }) => body)).toMatchObject([{ quantity: 14 }, { quantity: 14 }]);
     expect(asked[0]?.address).toBe('/api/counts/3/lines/7');
 
     answer = () => refuse(409);
     expect(await send()).toMatchObject([{ status: 409 }]);
-    expect(waitingEntries()).toMatchObject([{ person: 'owner@example.com' }]);
+    expect(entryOutbox.waiting()).toMatchObject([{ person: 'owner@example.com' }]);
   });
 });

@@ -1,28 +1,21 @@
 import type { StockCount } from '@hidewright/contract';
 import { useQueryClient } from '@tanstack/react-query';
-import { useCallback, useEffect, useState, useSyncExternalStore } from 'react';
+import { useCallback, useState, useSyncExternalStore } from 'react';
 import { say } from '../../components/toast.ts';
 import type { ApiProblem } from '../../lib/api-problem.ts';
+import { useResending } from '../../lib/use-resending.ts';
 import { countQuery } from './counts.queries.ts';
-import {
-  putEntry,
-  sendWaitingEntries,
-  subscribe,
-  waitingEntries,
-  type Entry,
-} from './entry-outbox.ts';
-
-const retryMs = 10_000;
+import { entryOutbox, putEntry, type Entry } from './entry-outbox.ts';
 
 /** Counting that loses nothing: kept on this device as it is typed, sent, and sent again until it has arrived. */
 export function useEntryOutbox(person: string, countId: number) {
   const client = useQueryClient();
-  const all = useSyncExternalStore(subscribe, waitingEntries);
+  const all = useSyncExternalStore(entryOutbox.subscribe, entryOutbox.waiting);
   const [refused, setRefused] = useState<ApiProblem>();
 
   const send = useCallback(
     () =>
-      sendWaitingEntries(person, {
+      entryOutbox.send(person, {
         onSent: (sent, { line, replaced }) => {
           client.setQueryData<StockCount>(
             countQuery(sent.countId).queryKey,
@@ -38,16 +31,7 @@ export function useEntryOutbox(person: string, countId: number) {
     [client, person],
   );
 
-  useEffect(() => {
-    const again = () => void send();
-    again();
-    window.addEventListener('online', again);
-    const timer = setInterval(again, retryMs);
-    return () => {
-      window.removeEventListener('online', again);
-      clearInterval(timer);
-    };
-  }, [send]);
+  useResending(send);
 
   const enter = useCallback(
     (lineId: number, entry: Entry) => {

@@ -39,7 +39,7 @@ const put = (good: number, person = 'maker@example.com') =>
 
 async function send(): Promise<ApiProblem[]> {
   const refused: ApiProblem[] = [];
-  await outbox.sendWaitingLogs('maker@example.com', {
+  await outbox.logOutbox.send('maker@example.com', {
     onSent: () => undefined,
     onRefused: (_log, problem) => refused.push(problem),
   });
@@ -50,9 +50,9 @@ describe('what is logged at the bench', () => {
   it('stays on the device while nothing can be reached, also when the page is opened anew', async () => {
     put(13);
     await send();
-    expect(outbox.waitingLogs()).toHaveLength(1);
+    expect(outbox.logOutbox.waiting()).toHaveLength(1);
     outbox = await open();
-    expect(outbox.waitingLogs()).toMatchObject([{ body: { good: 13 } }]);
+    expect(outbox.logOutbox.waiting()).toMatchObject([{ body: { good: 13 } }]);
   });
 
   it('is sent again under the same key, so that it counts once', async () => {
@@ -70,20 +70,20 @@ describe('what is logged at the bench', () => {
     answer = () => Promise.resolve(refusal(422, 'Log at most 3.'));
     const refused = await send();
     expect(refused.map(({ detail }) => detail)).toEqual(['Log at most 3.', 'Log at most 3.']);
-    expect(outbox.waitingLogs()).toEqual([]);
+    expect(outbox.logOutbox.waiting()).toEqual([]);
   });
 
   it.each([401, 429, 503])('waits through a %i', async (status) => {
     put(13);
     answer = () => Promise.resolve(refusal(status, 'Not now.'));
     expect(await send()).toEqual([]);
-    expect(outbox.waitingLogs()).toHaveLength(1);
+    expect(outbox.logOutbox.waiting()).toHaveLength(1);
   });
 
   it('is not sent in the name of somebody else', async () => {
     put(13, 'owner@example.com');
     await send();
     expect(keys).toEqual([]);
-    expect(outbox.waitingLogs()).toHaveLength(1);
+    expect(outbox.logOutbox.waiting()).toHaveLength(1);
   });
 });
