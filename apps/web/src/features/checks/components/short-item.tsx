@@ -2,6 +2,7 @@ import type { ShortForRuns } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { rackAreaText, countText, dayText } from '../../../lib/formatting.ts';
 import { WeeksPicture } from '../../../components/weeks-picture.tsx';
+import { WeeksTable } from '../../../components/weeks-table.tsx';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 /** What is short of one thing, by when it can be here, and how it goes on: a picture, and the same as a table. */
@@ -34,7 +35,7 @@ export function ShortItem({ item }: { item: ShortForRuns }) {
       <WeeksPicture item={item} say={say} />
       <details>
         <summary className="min-h-11 rounded py-2.5">Day by day</summary>
-        <WeeksTable item={item} say={say} />
+        <WeeksTable days={item.days} dayWord="Day" say={say} />
       </details>
     </section>
   );
@@ -56,51 +57,4 @@ function buying(
 
 function draftedWords({ drafted, drafts }: ShortForRuns): string | undefined {
   return Number(drafted) > 0 ? `on draft ${drafts.join(' and ')}` : undefined;
-}
-
-function WeeksTable({ item, say }: { item: ShortForRuns; say: (value: string) => string }) {
-  const { today } = useWorkshop();
-  return (
-    <table className="w-full text-left">
-      <thead>
-        <tr className="text-sm text-ink-soft">
-          <th scope="col" className="py-1 pr-3 font-normal">
-            Day
-          </th>
-          <th scope="col" className="py-1 pr-3 text-right font-normal">
-            Comes
-          </th>
-          <th scope="col" className="py-1 pr-3 text-right font-normal">
-            Goes
-          </th>
-          <th scope="col" className="py-1 text-right font-normal">
-            Free then
-          </th>
-        </tr>
-      </thead>
-      <tbody>
-        {item.days.map((each) => (
-          <tr key={each.day} className="border-t border-stitch/60 align-top">
-            <th scope="row" className="py-1.5 pr-3 font-normal">
-              {dayText(each.day, today)}
-              <span className="block text-sm text-ink-soft">{each.what.join(', ')}</span>
-            </th>
-            <td className="py-1.5 pr-3 text-right">
-              {Number(each.comes) > 0 ? say(each.comes) : '–'}
-            </td>
-            <td className="py-1.5 pr-3 text-right">
-              {Number(each.goes) > 0 ? say(each.goes) : '–'}
-            </td>
-            <td className="py-1.5 text-right whitespace-nowrap">
-              {Number(each.left) < 0 ? (
-                <strong className="font-semibold text-oxblood">{`${say(each.left.slice(1))} short`}</strong>
-              ) : (
-                say(each.left)
-              )}
-            </td>
-          </tr>
-        ))}
-      </tbody>
-    </table>
-  );
 }
