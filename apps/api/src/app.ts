@@ -176,6 +176,10 @@ async function serveWeb(app: Express): Promise<void> {
   if (!existsSync(page)) return;
   const html = await readFile(page, 'utf8');
   app.use(express.static(web, { index: false, setHeaders: cacheForever }));
+  // A page that is open since before an upgrade asks for files that are gone: it must hear so, and not get a page.
+  app.use('/assets', (_request, response) => {
+    response.status(404).type('text').send('This file is not there any more. Load the page again.');
+  });
   app.get('/{*path}', (_request, response) => {
     response.type('html').set('Cache-Control', 'no-store').send(html);
   });

@@ -1,5 +1,6 @@
 import './lib/zod-without-eval.ts';
 import './app.css';
+import './lib/fresh-after-upgrade.ts';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { RouterProvider } from 'react-router-dom';

@@ -8,6 +8,7 @@ import {
   ticketHead,
   type Paper,
 } from './paper.ts';
+import { drawTable } from './paper-table.ts';
 import { printedDay, printedNumber } from './paper-text.ts';
 
 interface PrintedLine {
@@ -62,7 +63,16 @@ export function drawInvoice(invoice: InvoiceSnapshot): Promise<Uint8Array> {
     about: invoice.title,
   });
   const below = Math.max(drawParties(paper, invoice), drawFacts(paper, invoice));
-  drawTotals(paper, invoice, drawLines(paper, invoice, below + 20));
+  drawTotals(
+    paper,
+    invoice,
+    drawTable(
+      paper,
+      columns,
+      invoice.lines.map((line) => cellsOf(line, invoice.digits)),
+      below + 20,
+    ),
+  );
   return bytesOf(paper);
 }
 
@@ -110,20 +120,6 @@ function drawFacts(paper: Paper, invoice: InvoiceSnapshot): number {
   return paper.y;
 }
 
-function drawLines(paper: Paper, invoice: InvoiceSnapshot, top: number): number {
-  let y = drawHeads(paper, top);
-  for (const line of invoice.lines) {
-    paper.font('plain').fontSize(10);
-    const height = paper.heightOfString(line.description, { width: columns[0].width });
-    if (y + height > sheet.bottom) {
-      paper.addPage();
-      y = drawHeads(paper, sheet.top);
-    }
-    y = drawRow(paper, y, cellsOf(line, invoice.digits), ink) + 6;
-  }
-  return y;
-}
-
 function cellsOf(line: PrintedLine, digits: number): Cells {
   return {
     description: line.description,
@@ -132,24 +128,6 @@ function cellsOf(line: PrintedLine, digits: number): Cells {
     tax: line.taxPercent === null ? '–' : `${line.taxPercent} %`,
     amount: printedNumber(line.amount, digits),
   };
-}
-
-function drawHeads(paper: Paper, y: number): number {
-  const titles = Object.fromEntries(columns.map(({ name, title }) => [name, title])) as Cells;
-  const below = drawRow(paper, y, titles, inkSoft);
-  stitchAcross(paper, below + 4);
-  return below + 12;
-}
-
-function drawRow(paper: Paper, y: number, cells: Cells, colour: string): number {
-  let lowest = y;
-  paper.font('plain').fontSize(10).fillColor(colour);
-  for (const column of columns) {
-    const align = column.name === 'description' ? 'left' : 'right';
-    paper.text(cells[column.name], sheet.left + column.at, y, { width: column.width, align });
-    lowest = Math.max(lowest, paper.y);
-  }
-  return lowest;
 }
 
 function drawTotals(paper: Paper, invoice: InvoiceSnapshot, top: number): void {

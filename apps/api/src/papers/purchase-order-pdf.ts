@@ -8,6 +8,7 @@ import {
   ticketHead,
   type Paper,
 } from './paper.ts';
+import { drawTable } from './paper-table.ts';
 import { printedDay, printedNumber } from './paper-text.ts';
 import { drawQrCode } from './qr-code.ts';
 
@@ -56,7 +57,20 @@ export function drawPurchaseOrder(order: PurchaseOrderPaper): Promise<Uint8Array
     about: 'Please send us what stands below.',
   });
   const below = Math.max(drawFacts(paper, order), drawCode(paper, order));
-  drawWords(paper, order, drawTotal(paper, order, drawLines(paper, order, below + 20)));
+  drawWords(
+    paper,
+    order,
+    drawTotal(
+      paper,
+      order,
+      drawTable(
+        paper,
+        columns,
+        order.lines.map((line) => cellsOf(line, order.digits)),
+        below + 20,
+      ),
+    ),
+  );
   return bytesOf(paper);
 }
 
@@ -105,20 +119,6 @@ function drawCode(paper: Paper, { number }: PurchaseOrderPaper): number {
   return paper.y;
 }
 
-function drawLines(paper: Paper, order: PurchaseOrderPaper, top: number): number {
-  let y = drawHeads(paper, top);
-  for (const line of order.lines) {
-    paper.font('plain').fontSize(10);
-    const height = paper.heightOfString(line.name, { width: columns[0].width });
-    if (y + height > sheet.bottom) {
-      paper.addPage();
-      y = drawHeads(paper, sheet.top);
-    }
-    y = drawRow(paper, y, cellsOf(line, order.digits), ink) + 6;
-  }
-  return y;
-}
-
 function cellsOf(line: PurchaseOrderPaper['lines'][number], digits: number): Cells {
   return {
     what: line.name,
@@ -126,24 +126,6 @@ function cellsOf(line: PurchaseOrderPaper['lines'][number], digits: number): Cel
     price: `${printedNumber(line.unitPrice, digits)} ${line.per}`,
     amount: printedNumber(line.amount, digits),
   };
-}
-
-function drawHeads(paper: Paper, y: number): number {
-  const titles = Object.fromEntries(columns.map(({ name, title }) => [name, title])) as Cells;
-  const below = drawRow(paper, y, titles, inkSoft);
-  stitchAcross(paper, below + 4);
-  return below + 12;
-}
-
-function drawRow(paper: Paper, y: number, cells: Cells, colour: string): number {
-  let lowest = y;
-  paper.font('plain').fontSize(10).fillColor(colour);
-  for (const column of columns) {
-    const align = column.name === 'what' ? 'left' : 'right';
-    paper.text(cells[column.name], sheet.left + column.at, y, { width: column.width, align });
-    lowest = Math.max(lowest, paper.y);
-  }
-  return lowest;
 }
 
 function drawTotal(paper: Paper, order: PurchaseOrderPaper, top: number): number {
