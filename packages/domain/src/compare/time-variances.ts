@@ -46,12 +46,13 @@ export interface TimeVariances {
  */
 export function timeVariances(input: TimeInput): TimeVariances {
   const { places } = input;
-  const said = perMinute(input.saidWagePerHour, 'saidWagePerHour');
-  const paid = perMinute(input.wasWagePerHour, 'wasWagePerHour');
+  const said = readDecimal(input.saidWagePerHour, 'saidWagePerHour', { min: 0 });
+  const paid = readDecimal(input.wasWagePerHour, 'wasWagePerHour', { min: 0 });
   const saidCost = readDecimal(input.saidCost, 'saidCost', { places });
-  const wasCost = totalOf(input.steps, 'was')
-    .times(paid)
-    .toDecimalPlaces(places, Exact.ROUND_HALF_UP);
+  const wasCost = wagesFor(totalOf(input.steps, 'was'), paid).toDecimalPlaces(
+    places,
+    Exact.ROUND_HALF_UP,
+  );
   const exact = input.steps.flatMap((step, at) => partsOf(step, at, said, paid));
   const sum = wasCost.minus(saidCost);
   const other = exact.reduce((left, part) => left.minus(part), sum);
@@ -67,16 +68,16 @@ export function timeVariances(input: TimeInput): TimeVariances {
   };
 }
 
-const perMinute = (wage: DecimalText, field: string): Decimal =>
-  readDecimal(wage, field, { min: 0 }).div(60);
+/** Multiplied before it is divided: a wage per minute seldom ends, and half a cent must stay half a cent. */
+const wagesFor = (minutes: Decimal, perHour: Decimal): Decimal => minutes.times(perHour).div(60);
 
 function partsOf(step: StepTimes, at: number, said: Decimal, paid: Decimal): Decimal[] {
   const minutes = (name: keyof StepTimes) =>
     readDecimal(step[name], `steps.${at}.${name}`, { min: 0 });
   return [
-    minutes('was').minus(minutes('saidForMade')).times(said),
-    minutes('saidForMade').minus(minutes('said')).times(said),
-    minutes('was').times(paid.minus(said)),
+    wagesFor(minutes('was').minus(minutes('saidForMade')), said),
+    wagesFor(minutes('saidForMade').minus(minutes('said')), said),
+    wagesFor(minutes('was'), paid.minus(said)),
   ];
 }
 

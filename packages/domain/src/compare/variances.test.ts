@@ -67,6 +67,12 @@ describe('timeVariances', () => {
     });
   });
 
+  it('rounds half a cent up where the wage per minute does not end', () => {
+    const steps = [{ said: '0', saidForMade: '0', was: '3952.65' }];
+    const wages = { saidWagePerHour: '0', wasWagePerHour: '74', saidCost: '0.00', places: 2 };
+    expect(timeVariances({ steps, ...wages }).sum).toBe('4874.94');
+  });
+
   it('loses no cent, and its sum is the wages that were less those that were said', () => {
     const step = fc.record({
       said: hundredths(100_000),
