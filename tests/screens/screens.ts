@@ -1,7 +1,7 @@
 import { mkdir, rm, writeFile } from 'node:fs/promises';
 import path from 'node:path';
-import { AxeBuilder } from '@axe-core/playwright';
 import type { BrowserContext, Page } from 'playwright-core';
+import { axeFindings, selectorOf } from '../support/axe.ts';
 import { browser, closeBrowser, phone, still, watch, wide } from '../support/browser.ts';
 import { startHidewright } from '../support/hidewright.ts';
 import { mailThat } from '../support/mailbox.ts';
@@ -38,9 +38,11 @@ async function draw(page: Page, screen: Screen, name: string, heard: string[]): 
   await settled(page);
   await page.screenshot({ path: path.join(folder, `${name}.png`), fullPage: true });
   drawn += 1;
-  const { violations } = await new AxeBuilder({ page }).analyze();
-  for (const { id, nodes } of violations) {
-    findings.push({ screen: name, what: `axe ${id}: ${nodes[0]?.target.join(' ') ?? ''}` });
+  for (const { id, nodes } of await axeFindings(page)) {
+    findings.push({
+      screen: name,
+      what: `axe ${id}: ${nodes.slice(0, 1).map(selectorOf).join('')}`,
+    });
   }
   const tooWide = await page.evaluate(
     () => document.documentElement.scrollWidth > window.innerWidth,

@@ -1,6 +1,6 @@
-import { AxeBuilder } from '@axe-core/playwright';
 import type { Page } from 'playwright-core';
 import { expect, test } from 'vitest';
+import { axeFindings, selectorOf } from './axe.ts';
 import { browser, still, watch, wide } from './browser.ts';
 import { settled } from './steps.ts';
 
@@ -26,11 +26,10 @@ export const walk = test.extend<Walk>({
 
 /** Fails with what axe finds against WCAG 2.2 AA on the page as it stands. */
 export async function expectAccessible(page: Page): Promise<void> {
-  const { violations } = await new AxeBuilder({ page }).analyze();
-  const findings = violations.map(({ id, help, nodes }) => ({
+  const findings = (await axeFindings(page)).map(({ id, help, nodes }) => ({
     id,
     help,
-    where: nodes.slice(0, 3).map((node) => node.target.join(' ')),
+    where: nodes.slice(0, 3).map(selectorOf),
   }));
   expect(findings, page.url()).toEqual([]);
 }

@@ -19,18 +19,15 @@ export function PersonMenu({ person }: { person: SignedIn }) {
   return (
     <Menu.Root>
       <div ref={setHome} />
-      <Menu.Trigger
-        aria-label={`${person.name}, ${person.role}`}
-        className="flex min-h-10 shrink-0 items-center gap-2 rounded px-2 hover:bg-stitch/20 data-popup-open:bg-stitch/20"
-      >
+      <Menu.Trigger className="flex min-h-10 shrink-0 items-center gap-2 rounded px-2 hover:bg-stitch/20 data-popup-open:bg-stitch/20">
         <span
           aria-hidden="true"
           className="grid size-8 place-items-center rounded-full border-2 border-brass bg-manila text-sm font-bold"
         >
           {initials(person.name)}
         </span>
-        <span className="hidden text-left leading-tight lg:block">
-          {person.name.split(' ')[0]}
+        <span className="sr-only text-left leading-tight lg:not-sr-only">
+          {person.name.split(' ')[0]}{' '}
           <span className="block text-sm text-ink-soft">{person.role}</span>
         </span>
         <ChevronDown size={16} aria-hidden="true" className="hidden text-ink-soft lg:block" />

@@ -102,7 +102,7 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
           tone="quiet"
           className="-mt-2 -mr-2 min-h-11"
           onClick={onRemove}
-          aria-label={`Remove ${line?.name ?? `hardware ${at + 1}`}`}
+          aria-label={line ? `Did not come: ${line.name}` : `Remove hardware ${at + 1}`}
         >
           {line ? 'Did not come' : 'Remove'}
         </Button>
