@@ -107,7 +107,7 @@ export * from './stock/check-words.ts';
 export * from './stock/coming-weeks.ts';
 export * from './stock/coming-stock.ts';
 export * from './stock/what-to-buy.ts';
-export { usableAreaMm2 } from './stock/pieces-from-lot.ts';
+export { usableOf } from './stock/pieces-from-lot.ts';
 export type { CutFrom } from './stock/pieces-from-lot.ts';
 export type { Dated, PromisePool } from './stock/promise-pool.ts';
 export * from './stock/order-quantity.ts';

@@ -9,6 +9,13 @@ const absoluteMs = 30 * 24 * 3_600_000;
 /** An unchanged session's end is moved on at most this often, so that reading stays reading. */
 const touchEveryMs = 10 * 60_000;
 
+declare module 'express-session' {
+  interface SessionData {
+    /** When it began and when it ends by now; read with it, so that touching it need not read it again. */
+    life?: { beganAt: string; endsAt: string };
+  }
+}
+
 type Done<T = void> = (error?: unknown, value?: T | null) => void;
 
 /** Keeps sessions in the database; a session ends when idle for 12 hours, and in any case after 30 days. */
@@ -40,14 +47,19 @@ export class SessionStore extends Store {
     );
   }
 
-  override touch(sessionId: string, _session: SessionData, done: Done = () => undefined): void {
-    settle(this.#extend(sessionId), done);
+  override touch(sessionId: string, session: SessionData, done: Done = () => undefined): void {
+    settle(this.#extend(sessionId, session), done);
   }
 
+  /** Every request asks for it: in plain SQL, which is quicker than an entity. */
   async #find(sessionId: string): Promise<SessionData | null> {
-    const row = await this.#orm.em.fork().findOne(WebSession, { idHash: hash(sessionId) });
-    if (row === null || row.expiresAt <= this.#clock.now().toISOString()) return null;
-    return JSON.parse(row.data) as SessionData;
+    const [row] = await this.#orm.em.execute<Kept[]>(
+      'SELECT data, created_at, expires_at FROM web_session WHERE id_hash = ?',
+      [hash(sessionId)],
+    );
+    if (row === undefined || row.expires_at <= this.#clock.now().toISOString()) return null;
+    const data = JSON.parse(row.data) as SessionData;
+    return { ...data, life: { beganAt: row.created_at, endsAt: row.expires_at } };
   }
 
   async #keep(sessionId: string, session: SessionData): Promise<void> {
@@ -57,21 +69,30 @@ export class SessionStore extends Store {
       const kept = await em.findOne(WebSession, { idHash: hash(sessionId) });
       const row = kept ?? em.create(WebSession, blankSession(sessionId, now));
       row.personId = personOf(session);
-      row.data = JSON.stringify(session);
+      row.data = JSON.stringify({ ...session, life: undefined });
       em.persist(row);
     });
   }
 
-  async #extend(sessionId: string): Promise<void> {
-    const em = this.#orm.em.fork();
-    const row = await em.findOne(WebSession, { idHash: hash(sessionId) });
-    if (row === null) return;
+  async #extend(sessionId: string, { life }: SessionData): Promise<void> {
+    if (life === undefined) return;
     const now = this.#clock.now();
-    const end = Math.min(now.getTime() + idleMs, new Date(row.createdAt).getTime() + absoluteMs);
-    if (end - new Date(row.expiresAt).getTime() < touchEveryMs) return;
-    row.expiresAt = new Date(end).toISOString();
-    await em.flush();
+    const end = Math.min(now.getTime() + idleMs, new Date(life.beganAt).getTime() + absoluteMs);
+    if (end - new Date(life.endsAt).getTime() < touchEveryMs) return;
+    await this.#orm.em
+      .fork()
+      .nativeUpdate(
+        WebSession,
+        { idHash: hash(sessionId) },
+        { expiresAt: new Date(end).toISOString() },
+      );
   }
+}
+
+interface Kept {
+  data: string;
+  created_at: string;
+  expires_at: string;
 }
 
 const hash = (sessionId: string) => createHash('sha256').update(sessionId).digest('hex');

@@ -106,9 +106,11 @@ async function findByPassword(
   return person !== null && matches ? person : undefined;
 }
 
+/** Every request asks for them: in plain SQL, which is quicker than an entity. */
 async function findActive(context: Context, id: number): Promise<Express.User | undefined> {
-  const person = await context.orm.em.fork().findOne(Person, { id, active: true });
-  return person === null
-    ? undefined
-    : { id: person.id, name: person.name, email: person.email, role: person.role };
+  const [person] = await context.orm.em.execute<Express.User[]>(
+    'SELECT id, name, email, role FROM person WHERE id = ? AND active = 1',
+    [id],
+  );
+  return person;
 }

@@ -8,8 +8,9 @@ export function printedNumber(text: string, digits: number): string {
   return format.format(text as Intl.StringNumericLiteral);
 }
 
+const longDay = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' });
+
 /** A calendar day as printed: 14 December 2026. */
 export function printedDay(day: string): string {
-  const format = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' });
-  return format.format(new Date(`${day}T00:00:00Z`));
+  return longDay.format(new Date(`${day}T00:00:00Z`));
 }

@@ -94,11 +94,12 @@ export function dayText(day: string, today?: string): string {
   return `${weekdays[weekday]} ${date} ${month}${other ? ` ${year}` : ''}`;
 }
 
+const longMonth = new Intl.DateTimeFormat('en', { month: 'long', timeZone: 'UTC' });
+
 /** Monday 14 December */
 export function longDayText(day: string): string {
   const { date, weekday } = dayParts(day);
-  const month = new Intl.DateTimeFormat('en', { month: 'long', timeZone: 'UTC' });
-  return `${longWeekdays[weekday]} ${date} ${month.format(new Date(`${day.slice(0, 10)}T00:00:00Z`))}`;
+  return `${longWeekdays[weekday]} ${date} ${longMonth.format(new Date(`${day.slice(0, 10)}T00:00:00Z`))}`;
 }
 
 /** An instant in the workshop's time: Mon 14 Dec, 08:40 */

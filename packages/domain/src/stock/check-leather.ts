@@ -1,14 +1,14 @@
 import type { Day } from '../promise/day.ts';
-import { Exact } from '../numbers/decimal-text.ts';
 import { drawOrMend, lessDrafted, type Standing } from './check-items.ts';
 import type { LeatherNeed, LeatherStock, RackLot } from './check-stock.ts';
 import { chooseLots, type LotOffer, shadesOf } from './choose-lots.ts';
 import {
   areaForPieces,
   type LotToCut,
+  panelArea,
   type PiecesOfLot,
   piecesFromLot,
-  usableAreaMm2,
+  usableOf,
 } from './pieces-from-lot.ts';
 
 export interface LotTaken {
@@ -43,17 +43,16 @@ interface Offered {
   from: PiecesOfLot;
 }
 
-const thousandths = 1000;
-
 /** Draws a run's pieces from the lots, and what they do not give from leather that is yet to come. */
 export function drawLeather(
   leather: LeatherStock,
   need: LeatherNeed,
   when: { pieces: number; day: Day; today: Day },
 ): { facts: LeatherFacts; left: LeatherStock } {
+  const panel = panelArea(need.cut);
   const offered = leather.lots.map((lot): Offered => {
     const cut = { ...lot, laid: need.laid.get(lot.lotId) ?? null };
-    return { lot, cut, from: piecesFromLot(cut, need.cut) };
+    return { lot, cut, from: piecesFromLot(cut, need.cut, panel) };
   });
   const offers = offered.map(({ lot, from }): LotOffer => ({ ...lot, pieces: from.pieces }));
   const fromLots = Math.min(when.pieces, notOwed(leather, need));
@@ -80,12 +79,8 @@ export function drawLeather(
 /** Pieces that may be cut now without taking what jobs taken on before still need. */
 function notOwed({ lots, owed }: LeatherStock, { cut }: LeatherNeed): number {
   if (owed === 0) return Infinity;
-  const usable = lots.reduce(
-    (sum, lot) => sum.plus(usableAreaMm2({ ...lot, laid: null })),
-    new Exact(0),
-  );
-  const panels = usable.minus(new Exact(owed).div(thousandths)).div(cut.areaMm2).floor();
-  return Math.max(0, panels.toNumber()) * cut.pieces;
+  const panels = Math.floor((usableOf(lots) - owed) / panelArea(cut));
+  return Math.max(0, panels) * cut.pieces;
 }
 
 function takeFrom({ lot, cut, from }: Offered, pieces: number): LotTaken {
@@ -95,7 +90,7 @@ function takeFrom({ lot, cut, from }: Offered, pieces: number): LotTaken {
     pieces,
     by: from.by,
     units,
-    area: areaForPieces(cut, from, pieces).times(thousandths).toNumber(),
+    area: areaForPieces(cut, from, pieces),
     unitsLeft: Math.floor(from.pieces / from.perUnit) - units,
   };
 }
@@ -113,7 +108,7 @@ function drawRest(
   { cut }: LeatherNeed,
   { pieces, day, today }: { pieces: number; day: Day; today: Day },
 ): Rest {
-  const panel = new Exact(cut.areaMm2).times(thousandths).ceil().toNumber();
+  const panel = panelArea(cut);
   const needed = Math.ceil(pieces / cut.pieces) * panel;
   const { standing, left } = drawOrMend({ pool, buying, needed, day, today });
   const panelsInTime = Math.floor((needed - standing.short) / panel);
@@ -121,11 +116,7 @@ function drawRest(
 }
 
 const areaOfOffers = (offered: readonly Offered[]): number =>
-  offered.reduce(
-    (sum, { cut, from }) =>
-      sum + areaForPieces(cut, from, from.pieces).times(thousandths).toNumber(),
-    0,
-  );
+  offered.reduce((sum, { cut, from }) => sum + areaForPieces(cut, from, from.pieces), 0);
 
 function withLots(rest: Standing, takes: readonly LotTaken[], onRack: number): Standing {
   const taken = takes.reduce((sum, { area }) => sum + area, 0);
@@ -140,9 +131,7 @@ function withLots(rest: Standing, takes: readonly LotTaken[], onRack: number): S
 function leftOf(leather: LeatherStock, takes: readonly LotTaken[], rest: Rest): LeatherStock {
   const lots = leather.lots.map((lot) => {
     const taken = takes.find((take) => take.lot.lotId === lot.lotId);
-    if (taken === undefined) return lot;
-    const free = new Exact(lot.freeAreaMm2).minus(new Exact(taken.area).div(thousandths));
-    return { ...lot, freeAreaMm2: free.toFixed() };
+    return taken === undefined ? lot : { ...lot, freeArea: lot.freeArea - taken.area };
   });
   return {
     ...leather,

@@ -35,11 +35,11 @@ const lot = (lotId: number, panels: number, change: Partial<RackLot> = {}): Rack
   place: 'rack 1',
   shade: '',
   receivedOn: addDays('2026-01-01', lotId),
-  freeAreaMm2: String(panels * 120_000),
-  measuredAreaMm2: String(panels * 120_000),
-  usablePercent: '100',
+  freeArea: panels * 120_000_000,
+  measuredArea: panels * 120_000_000,
+  usablePercent: 100,
   panel: null,
-  drawnAreaMm2: null,
+  drawnArea: null,
   ...change,
 });
 
@@ -262,7 +262,7 @@ const receipts = fc.array(
 );
 const stockOf = (lots: number[], free: number, comes: { day: string; quantity: number }[]) =>
   shop({
-    leathers: [russet(lots.map((panels, at) => lot(at + 1, panels, { usablePercent: '85' })))],
+    leathers: [russet(lots.map((panels, at) => lot(at + 1, panels, { usablePercent: 85 })))],
     items: [rivets(free, { pool: { free, receipts: comes, promised: [] } })],
   });
 

@@ -1,5 +1,9 @@
-import type { Decimal } from 'decimal.js';
 import { type DecimalText, Exact } from '../numbers/decimal-text.ts';
+
+/*
+ * Areas of lots are whole thousandths of mm², the least that the rack's book keeps, so that a rack of hundreds of
+ * lots is gone through exactly and at once.
+ */
 
 /** What a pattern is cut from, as its layout says: so many pieces from a panel or strip of such an area. */
 export interface CutFrom {
@@ -9,17 +13,17 @@ export interface CutFrom {
   sides: { widthMm: number; heightMm: number } | null;
 }
 
-/** A lot on the rack as far as cutting goes. */
+/** A lot on the rack as far as cutting goes; areas in thousandths of mm². */
 export interface LotToCut {
-  freeAreaMm2: DecimalText;
+  freeArea: number;
   /** as measured when it came */
-  measuredAreaMm2: DecimalText;
-  /** the share of it that can be cut where nothing is drawn */
-  usablePercent: DecimalText;
+  measuredArea: number;
+  /** the share of it that can be cut where nothing is drawn: 1 to 100, to the ten-thousandth */
+  usablePercent: number;
   /** the sides of one panel or strip of the bundle; null for anything else */
   panel: { widthMm: number; heightMm: number } | null;
   /** area inside its drawn edge less its flaws; null where it is not drawn */
-  drawnAreaMm2: DecimalText | null;
+  drawnArea: number | null;
   /** pieces that a layout on it as drawn gives, of the whole lot; null where none is laid out */
   laid: number | null;
 }
@@ -30,62 +34,75 @@ export interface PiecesOfLot {
   by: 'layout' | 'panels' | 'area';
   /** what one goes to the lot for: a piece, or a panel or strip of so many */
   perUnit: number;
-  unitAreaMm2: Decimal;
+  /** so many of those have such an area together, in thousandths of mm² */
+  units: { count: number; area: number };
 }
+
+/** A panel's area in whole thousandths of mm², any part of one rounded up. */
+export const panelArea = (cut: Pick<CutFrom, 'areaMm2'>): number =>
+  new Exact(cut.areaMm2).times(1000).ceil().toNumber();
 
 /**
  * How many pieces of a pattern a lot still gives. Laid out as drawn, its layout's count, in proportion to what is
  * free of it; of ready panels, whole ones; otherwise as many of the pattern's panels as the usable share holds
  * beside what is gone already. All by area, but for the layout: a share of waste stays with the lot.
+ * @param panel the area of the pattern's panel: `panelArea(cut)`
  */
-export function piecesFromLot(lot: LotToCut, cut: CutFrom): PiecesOfLot {
+export function piecesFromLot(lot: LotToCut, cut: CutFrom, panel = panelArea(cut)): PiecesOfLot {
   if (lot.laid !== null) return byLayout(lot, lot.laid);
   const perPanel = lot.panel === null ? 0 : panelsWithin(lot.panel, cut);
   return lot.panel !== null && perPanel > 0
     ? byPanels(lot, lot.panel, perPanel * cut.pieces)
-    : byArea(lot, cut);
+    : byArea(lot, cut.pieces, panel);
 }
 
-/** Area of a lot that goes for so many of its pieces, never more than is free. */
-export function areaForPieces(lot: LotToCut, from: PiecesOfLot, pieces: number): Decimal {
+/** Area of a lot in thousandths of mm² that goes for so many of its pieces, never more than is free. */
+export function areaForPieces(lot: LotToCut, from: PiecesOfLot, pieces: number): number {
+  const { count, area } = from.units;
   const units = Math.ceil(pieces / from.perUnit);
-  // A thousandth of a mm² is the least that the rack's book keeps.
-  const area = from.unitAreaMm2.times(units).toDecimalPlaces(3, Exact.ROUND_UP);
-  return Exact.min(area, lot.freeAreaMm2);
+  return Math.min(divided(area, units, count, 'up'), lot.freeArea);
 }
 
-function byLayout(lot: LotToCut, laid: number): PiecesOfLot {
-  const share = new Exact(lot.freeAreaMm2).div(lot.measuredAreaMm2);
+function byLayout({ freeArea, measuredArea }: LotToCut, laid: number): PiecesOfLot {
   return {
-    pieces: share.times(laid).floor().toNumber(),
+    pieces: divided(freeArea, laid, measuredArea, 'down'),
     by: 'layout',
     perUnit: 1,
-    unitAreaMm2: laid === 0 ? new Exact(0) : new Exact(lot.measuredAreaMm2).div(laid),
+    units: laid === 0 ? { count: 1, area: 0 } : { count: laid, area: measuredArea },
   };
 }
 
 function byPanels(
-  lot: LotToCut,
+  { freeArea }: LotToCut,
   { widthMm, heightMm }: { widthMm: number; heightMm: number },
   perUnit: number,
 ): PiecesOfLot {
-  const unitAreaMm2 = new Exact(widthMm).times(heightMm);
-  const panels = new Exact(lot.freeAreaMm2).div(unitAreaMm2).floor().toNumber();
-  return { pieces: panels * perUnit, by: 'panels', perUnit, unitAreaMm2 };
+  const area = new Exact(widthMm).times(heightMm).times(1000).ceil().toNumber();
+  const pieces = Math.floor(freeArea / area) * perUnit;
+  return { pieces, by: 'panels', perUnit, units: { count: 1, area } };
 }
 
-function byArea(lot: LotToCut, cut: CutFrom): PiecesOfLot {
-  const unitAreaMm2 = new Exact(cut.areaMm2);
-  const units = usableAreaMm2(lot).div(unitAreaMm2).floor().toNumber();
-  return { pieces: units * cut.pieces, by: 'area', perUnit: cut.pieces, unitAreaMm2 };
+function byArea(lot: LotToCut, perUnit: number, area: number): PiecesOfLot {
+  const pieces = Math.floor(usableArea(lot) / area) * perUnit;
+  return { pieces, by: 'area', perUnit, units: { count: 1, area } };
 }
 
-/** What can still be cut of a lot in mm², where no layout says it: its usable share less what is gone. */
-export function usableAreaMm2(lot: LotToCut): Decimal {
-  const share = new Exact(lot.measuredAreaMm2).times(lot.usablePercent).div(100);
-  const usable = lot.drawnAreaMm2 === null ? share : Exact.min(share, lot.drawnAreaMm2);
-  const gone = new Exact(lot.measuredAreaMm2).minus(lot.freeAreaMm2);
-  return Exact.max(0, Exact.min(usable.minus(gone), lot.freeAreaMm2));
+/** What can still be cut of a lot, where no layout says it: its usable share less what is gone. */
+export function usableArea(lot: Omit<LotToCut, 'laid'>): number {
+  const { freeArea, measuredArea, usablePercent, drawnArea } = lot;
+  const share = divided(measuredArea, Math.round(usablePercent * 10_000), 1_000_000, 'down');
+  const usable = Math.min(share, drawnArea ?? share);
+  return Math.max(0, Math.min(usable - (measuredArea - freeArea), freeArea));
+}
+
+/** What can still be cut of some lots together. */
+export const usableOf = (lots: readonly Omit<LotToCut, 'laid'>[]): number =>
+  lots.reduce((sum, lot) => sum + usableArea(lot), 0);
+
+/** `area × part / whole` of whole numbers of 0 or more, rounded; the product may be beyond exact numbers. */
+function divided(area: number, part: number, whole: number, rounded: 'up' | 'down'): number {
+  const beyond = rounded === 'up' ? BigInt(whole) - 1n : 0n;
+  return Number((BigInt(area) * BigInt(part) + beyond) / BigInt(whole));
 }
 
 /** How many of the pattern's panels lie side by side within one of the bundle, the better way round. */

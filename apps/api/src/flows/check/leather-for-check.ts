@@ -1,4 +1,4 @@
-import { drawnAreaMm2, Exact, type LeatherStock } from '@hidewright/domain';
+import { drawnAreaMm2, type LeatherStock } from '@hidewright/domain';
 import type { LotDrawing } from '@hidewright/contract';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
@@ -61,11 +61,11 @@ export function toRackLot(row: LotRow): LeatherStock['lots'][number] {
     place: row.place,
     shade: row.shade,
     receivedOn: row.received_on,
-    freeAreaMm2: unscaled(row.free, 3).toFixed(),
-    measuredAreaMm2: unscaled(row.measured_area_mm2, 3).toFixed(),
-    usablePercent: unscaled(row.usable_percent, 4).toFixed(),
+    freeArea: row.free,
+    measuredArea: row.measured_area_mm2,
+    usablePercent: row.usable_percent / 10_000,
     panel: panelOf(row),
-    drawnAreaMm2: drawnArea(row),
+    drawnArea: drawnArea(row),
   };
 }
 
@@ -79,12 +79,12 @@ function panelOf({ form, width_mm, height_mm }: LotRow) {
   };
 }
 
-function drawnArea({ outline, flaws }: LotRow): string | null {
+function drawnArea({ outline, flaws }: LotRow): number | null {
   if (outline === null) return null;
   const gone = (JSON.parse(flaws) as LotDrawing['flaws']).reduce(
     (sum, flaw) => sum + drawnAreaMm2(flaw),
     0,
   );
   const left = drawnAreaMm2(JSON.parse(outline) as NonNullable<LotDrawing['outline']>) - gone;
-  return new Exact(Math.max(0, left)).toDecimalPlaces(3, Exact.ROUND_DOWN).toFixed();
+  return Math.floor(Math.max(0, left) * 1000);
 }

@@ -1,10 +1,4 @@
-import {
-  Exact,
-  usableAreaMm2,
-  type ItemStock,
-  type LeatherStock,
-  type ShopStock,
-} from '@hidewright/domain';
+import { usableOf, type ItemStock, type LeatherStock, type ShopStock } from '@hidewright/domain';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
 import { Supplier } from '../../modules/suppliers/supplier.entity.ts';
@@ -95,11 +89,7 @@ function toLeatherStock(
   leather: Leather,
   { lots, owed, onOrder, seller, today }: OfLeather,
 ): LeatherStock {
-  const usable = lots
-    .reduce((sum, lot) => sum.plus(usableAreaMm2({ ...lot, laid: null })), new Exact(0))
-    .times(1000)
-    .floor()
-    .toNumber();
+  const usable = usableOf(lots);
   const usableShare = leather.wholeUsablePercent.dividedBy(100);
   const cuttable = (thousandths: number) => usableShare.times(thousandths).floor().toNumber();
   let onRack = usable;

@@ -134,7 +134,7 @@ function toLot(taken: LotTaken): CheckLot {
     tag: lot.tag,
     place: lot.place,
     shade: lot.shade,
-    freeAreaMm2: lot.freeAreaMm2,
+    freeAreaMm2: area(lot.freeArea),
     takesAreaMm2: area(taken.area),
     pieces,
     by,

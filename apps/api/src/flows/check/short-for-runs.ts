@@ -1,8 +1,7 @@
 import type { RunsCheck, ShortForRuns } from '@hidewright/contract';
 import {
   comingWeeks,
-  usableAreaMm2,
-  Exact,
+  usableOf,
   type Sourcing,
   type Change,
   type ComingWeeks,
@@ -85,11 +84,7 @@ interface Around {
 }
 
 function leatherShort(leather: LeatherStock, around: Around): ShortForRuns {
-  const usable = leather.lots
-    .reduce((sum, lot) => sum.plus(usableAreaMm2({ ...lot, laid: null })), new Exact(0))
-    .times(1000)
-    .floor()
-    .toNumber();
+  const usable = usableOf(leather.lots);
   const { reserved } = around.counted;
   return describe(
     { of: 'leather', id: leather.leatherId, name: leather.name, unit: 'mm2' },

@@ -1,5 +1,6 @@
 import { describeOutline, type RunInput } from '@hidewright/domain';
 import type { LayoutSource, Offer } from '@hidewright/contract';
+import { dayIn } from '../../day-in.ts';
 import { notFound, Problem } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { Customer } from '../customers/customer.entity.ts';
@@ -7,7 +8,6 @@ import { StoredLayout } from '../layouts/layout.entity.ts';
 import { pathOf } from '../layouts/stored-layouts.ts';
 import { Quote } from '../quotes/quote.entity.ts';
 import { quotedOf } from '../quotes/quoted.ts';
-import { dayOf } from '../quotes/say-day.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { quoteBehind } from './customer-links.ts';
 
@@ -51,7 +51,7 @@ export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
     resalePrice: (quote.input as RunInput).resalePrice ?? null,
     agreedQuantity: quote.agreedQuantity,
     agreedOption: quote.agreedOption,
-    agreedOn: quote.agreedAt === null ? null : dayOf(quote.agreedAt, workshop.timeZone),
+    agreedOn: quote.agreedAt === null ? null : dayIn(workshop.timeZone, new Date(quote.agreedAt)),
   };
 }
 

@@ -1,5 +1,6 @@
 import type { RunInput } from '@hidewright/domain';
 import type { QuotePaper } from '../../papers/quote-pdf.ts';
+import { dayIn } from '../../day-in.ts';
 import type { Work } from '../../work.ts';
 import { Customer } from '../customers/customer.entity.ts';
 import { StoredLayout } from '../layouts/layout.entity.ts';
@@ -7,7 +8,6 @@ import { pathOf } from '../layouts/stored-layouts.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import type { Quote } from './quote.entity.ts';
 import { quotedOf } from './quoted.ts';
-import { dayOf } from './say-day.ts';
 
 /** What goes on paper for a quote as it is now. */
 export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
@@ -20,7 +20,7 @@ export async function paperOf(work: Work, quote: Quote): Promise<QuotePaper> {
     shopAddress: workshop.address,
     customerName: customer.name,
     title: quote.title,
-    day: quote.sentAt === null ? work.today : dayOf(quote.sentAt, workshop.timeZone),
+    day: quote.sentAt === null ? work.today : dayIn(workshop.timeZone, new Date(quote.sentAt)),
     inHandsOn: quote.inHandsOn,
     validUntil:
       quote.validUntil ?? lastGoodDay(work.today, workshop.quoteValidDays, quote.inHandsOn),
