@@ -1,3 +1,3 @@
 import { launchApiProgram, pathArguments } from './workspace/launch.mjs';
 
-await launchApiProgram('backup.ts', pathArguments());
+await launchApiProgram('backup', pathArguments());

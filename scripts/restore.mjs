@@ -1,3 +1,3 @@
 import { launchApiProgram, pathArguments } from './workspace/launch.mjs';
 
-await launchApiProgram('restore.ts', pathArguments());
+await launchApiProgram('restore', pathArguments());

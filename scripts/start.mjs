@@ -1,3 +1,4 @@
+import { ensureApiBuilt } from './workspace/api-build.mjs';
 import { ensureInstalled } from './workspace/installed.mjs';
 import { apiFolder, apiProgram, withAbsolutePaths } from './workspace/launch.mjs';
 import { openLog } from './workspace/log-file.mjs';
@@ -21,7 +22,7 @@ async function end(code) {
 
 function startApi(settings, mailbox, log) {
   const handed = mailbox ? { SMTP_URL: mailbox.smtp, MAILBOX_URL: mailbox.web } : {};
-  return startService(process.execPath, apiProgram('server.ts'), {
+  return startService(process.execPath, apiProgram('server'), {
     cwd: apiFolder,
     env: {
       ...withAbsolutePaths(),
@@ -60,6 +61,7 @@ async function start() {
   const settings = await readSettings(process.argv.slice(2), process.env);
   await ensureInstalled();
   await ensureWebBuilt();
+  await ensureApiBuilt();
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0));
   watchParent(() => void end(0));
 

@@ -1,3 +1,3 @@
 import { launchApiProgram, pathArguments } from './workspace/launch.mjs';
 
-await launchApiProgram('verify.ts', pathArguments());
+await launchApiProgram('verify', pathArguments());

@@ -1,4 +1,5 @@
 import path from 'node:path';
+import { ensureApiBuilt } from './api-build.mjs';
 import { ensureInstalled } from './installed.mjs';
 import { inRoot } from './paths.mjs';
 import { become } from './run.mjs';
@@ -14,17 +15,18 @@ export function withAbsolutePaths(env = process.env) {
   return absolute;
 }
 
-/** tsx reads the compiler options of the folder it is started in, so each program starts in its own. */
 export const apiFolder = inRoot('apps', 'api');
 
-export function apiProgram(file) {
-  return ['--import', 'tsx', path.join('src', file)];
+/** How Node starts one of the API's programs as built: `ensureApiBuilt` comes first. */
+export function apiProgram(name) {
+  return ['--enable-source-maps', path.join('dist', `${name}.mjs`)];
 }
 
-/** Installs when needed, then becomes one of the API's programs, with a data folder as its argument. */
-export async function launchApiProgram(file, args) {
+/** Installs and builds when needed, then becomes one of the API's programs, with a data folder as its argument. */
+export async function launchApiProgram(name, args) {
   await ensureInstalled();
-  become(process.execPath, [...apiProgram(file), ...args], {
+  await ensureApiBuilt();
+  become(process.execPath, [...apiProgram(name), ...args], {
     cwd: apiFolder,
     env: withAbsolutePaths(),
   });

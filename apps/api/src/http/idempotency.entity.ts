@@ -17,7 +17,7 @@ export class IdempotentReply {
   @Property({ type: 'integer', columnType: 'integer' })
   status!: number;
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   reply!: unknown;
 
   @Property({ type: 'text', columnType: 'text' })

@@ -5,6 +5,10 @@ import { Type } from '@mikro-orm/core';
  * text of each is kept beside it, so that a flush does not write out every snapshot at hand again to compare it.
  */
 export class JsonText extends Type<unknown, string | null> {
+  override get runtimeType(): string {
+    return 'unknown';
+  }
+
   override convertToDatabaseValue(value: unknown): string | null {
     if (value === null || value === undefined) return null;
     if (typeof value !== 'object') return JSON.stringify(value);

@@ -5,6 +5,10 @@ import { Decimal } from 'decimal.js';
 export abstract class ScaledDecimal extends Type<Decimal | null, number | null> {
   abstract readonly places: number;
 
+  override get runtimeType(): string {
+    return 'Decimal';
+  }
+
   override convertToDatabaseValue(
     value: Decimal | string | number | null | undefined,
   ): number | null {

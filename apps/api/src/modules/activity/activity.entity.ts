@@ -28,7 +28,7 @@ export class Activity {
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   subjectId: number | null = null;
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   detail!: unknown;
 
   @Property({ type: 'text', columnType: 'text' })

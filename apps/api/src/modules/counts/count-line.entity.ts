@@ -16,7 +16,7 @@ export class CountLine {
   hardwareId: number | null = null;
 
   /** Found there, although the books had it elsewhere. */
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   added = false;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
@@ -27,11 +27,11 @@ export class CountLine {
   book: number | null = null;
 
   /** It is there and was not measured again. */
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   unmeasured = false;
 
   /** To be counted once more. */
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   again = false;
 
   @Property({ type: 'text', columnType: 'text', nullable: true })

@@ -26,7 +26,7 @@ export class Customer {
   @Property({ type: 'text', columnType: 'text' })
   note = '';
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

@@ -26,7 +26,7 @@ export class FinishedMovement {
   quantity!: number;
 
   /** Signed, at what they cost to make. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   value!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })

@@ -28,7 +28,7 @@ export class FinishedPiece {
   onHand!: number;
 
   /** What they cost to make: leather and hardware, no wages. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   value!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })

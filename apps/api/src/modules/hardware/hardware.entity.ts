@@ -29,7 +29,7 @@ export class Hardware {
   @Property({ type: 'text', columnType: 'text' })
   kind!: 'hardware' | 'supplies';
 
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   unitPrice!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer' })
@@ -65,32 +65,32 @@ export class Hardware {
   bin = '';
 
   /** The customer brings it: it is counted, and never bought. */
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   fromCustomer = false;
 
   /** A kit that costs what its parts cost. */
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   priceFromParts = false;
 
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   postLengthMm: Decimal | null = null;
 
   /** The folded stack that it holds, from the thinnest … */
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   stackMinMm: Decimal | null = null;
 
   /** … to the thickest. */
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   stackMaxMm: Decimal | null = null;
 
   /** The die that sets it, by the name or number that the shop gives it. */
   @Property({ type: 'text', columnType: 'text' })
   settingDie = '';
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   settingDieHere = true;
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

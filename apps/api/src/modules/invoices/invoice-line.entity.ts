@@ -20,15 +20,15 @@ export class InvoiceLine {
   @Property({ type: 'integer', columnType: 'integer' })
   quantity!: number;
 
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   unitPrice!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   amount!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   taxRateId: number | null = null;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   taxPercent!: Decimal;
 }

@@ -11,12 +11,12 @@ export class InvoiceTax {
   @Property({ type: 'integer', columnType: 'integer' })
   invoiceId!: number;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   percent!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   net!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   tax!: Decimal;
 }

@@ -32,22 +32,22 @@ export class Invoice {
   @Property({ type: 'text', columnType: 'text', nullable: true })
   dueOn: string | null = null;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   net!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   tax!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   total!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   paid!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   credited!: Decimal;
 
-  @Property({ type: JsonText, columnType: 'text', nullable: true })
+  @Property({ type: JsonText, nullable: true })
   snapshot: unknown | null = null;
 
   @Property({ type: 'text', columnType: 'text', nullable: true })

@@ -22,11 +22,11 @@ export class BenchLog {
   @Property({ type: 'integer', columnType: 'integer' })
   seconds!: number;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   minutes!: Decimal;
 
   /** What an hour of whoever logged it was paid then; null where it was the wage of the estimate. */
-  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  @Property({ type: MoneyType, nullable: true })
   wagePerHour: Decimal | null = null;
 
   @Property({ type: 'text', columnType: 'text' })

@@ -22,16 +22,16 @@ export class JobStep {
   @Property({ type: 'text', columnType: 'text' })
   per!: 'piece' | 'strike' | 'panel' | 'strip' | 'run';
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   setupMinutes!: Decimal;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   secondsPerUnit!: Decimal;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   rejectPercent!: Decimal;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   plannedMinutes!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer' })
@@ -43,6 +43,6 @@ export class JobStep {
   @Property({ type: 'integer', columnType: 'integer' })
   seconds = 0;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   minutes!: Decimal;
 }

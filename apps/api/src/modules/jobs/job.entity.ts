@@ -35,11 +35,11 @@ export class Job {
   @Property({ type: 'integer', columnType: 'integer' })
   containers!: number;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   plannedMinutes!: Decimal;
 
   /** What the quote said, for the comparison with what was. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   estimate!: unknown;
 
   @Property({ type: 'integer', columnType: 'integer' })

@@ -10,10 +10,10 @@ export class StoredLayout {
   @Property({ type: 'text', columnType: 'text' })
   inputHash!: string;
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   input!: unknown;
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   result!: unknown;
 
   @Property({ type: 'integer', columnType: 'integer' })

@@ -23,13 +23,13 @@ export class Leather {
   @Property({ type: 'text', columnType: 'text' })
   finish = '';
 
-  @Property({ type: OunceType, columnType: 'integer', nullable: true })
+  @Property({ type: OunceType, nullable: true })
   weightLowOz: Decimal | null = null;
 
-  @Property({ type: OunceType, columnType: 'integer', nullable: true })
+  @Property({ type: OunceType, nullable: true })
   weightHighOz: Decimal | null = null;
 
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   pricePerFt2!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
@@ -39,25 +39,25 @@ export class Leather {
   @Property({ type: 'text', columnType: 'text', nullable: true })
   wholeForm: LeatherReply['wholeForm'] = null;
 
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   wholeAreaMm2: Decimal | null = null;
 
   /** Free stock below this is worth an order; null where nobody minds. */
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   reorderAtMm2: Decimal | null = null;
 
   /** Set by the owner: order when less than this is left … */
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   orderPointMm2: Decimal | null = null;
 
   /** … and so much at a time. */
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   orderQuantityMm2: Decimal | null = null;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   wholeUsablePercent: Decimal = new Decimal(85);
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

@@ -32,20 +32,20 @@ export class Lot {
     | 'offcut';
 
   /** As measured when it came, all panels of the bundle together. */
-  @Property({ type: AreaType, columnType: 'integer' })
+  @Property({ type: AreaType })
   measuredAreaMm2!: Decimal;
 
   /** How many panels or strips the bundle held. */
   @Property({ type: 'integer', columnType: 'integer' })
   pieces = 1;
 
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   widthMm: Decimal | null = null;
 
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   heightMm: Decimal | null = null;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   cost!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })
@@ -70,15 +70,15 @@ export class Lot {
   parentId: number | null = null;
 
   /** Its edge as drawn, in mm; null where nobody drew it. */
-  @Property({ type: JsonText, columnType: 'text', nullable: true })
+  @Property({ type: JsonText, nullable: true })
   outline: unknown = null;
 
   /** Closed curves around what is not cut. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   flaws: unknown = [];
 
   /** The share of its area that can be cut, where its edge is not drawn. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   usablePercent: Decimal = new Decimal(85);
 
   /** The photo under its drawing. */
@@ -86,7 +86,7 @@ export class Lot {
   photoHash: string | null = null;
 
   /** Its top left corner in mm, and mm per pixel. */
-  @Property({ type: JsonText, columnType: 'text', nullable: true })
+  @Property({ type: JsonText, nullable: true })
   photoPlace: unknown = null;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

@@ -19,7 +19,7 @@ export class OutgoingMail {
   body!: string;
 
   /** Files by their hash. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   attachments!: { name: string; hash: string; type: string }[];
 
   @Property({ type: 'text', columnType: 'text' })

@@ -26,13 +26,13 @@ export class Order {
   @Property({ type: 'integer', columnType: 'integer' })
   quantity!: number;
 
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   priceEach!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   goodsTotal!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   toolingCharge!: Decimal;
 
   /** The option that was agreed; null for the piece as it is. */
@@ -40,13 +40,13 @@ export class Order {
   optionName: string | null = null;
 
   /** Charged once beside pieces and tooling. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   charges: { name: string; amount: string }[] = [];
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   chargesTotal: Decimal = new Decimal(0);
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   total!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })
@@ -62,7 +62,7 @@ export class Order {
     | 'closed'
     | 'cancelled';
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   awaits!: ('proof' | 'deposit' | 'tooling')[];
 
   @Property({ type: 'text', columnType: 'text', nullable: true })

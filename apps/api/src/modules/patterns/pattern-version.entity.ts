@@ -13,7 +13,7 @@ export class PatternVersion {
   @Property({ type: 'integer', columnType: 'integer' })
   number!: number;
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   definition!: unknown;
 
   @Property({ type: 'text', columnType: 'text' })

@@ -14,7 +14,7 @@ export class Pattern {
   @Property({ type: 'integer', columnType: 'integer' })
   latestVersion!: number;
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

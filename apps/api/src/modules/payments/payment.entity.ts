@@ -13,7 +13,7 @@ export class Payment {
   @Property({ type: 'integer', columnType: 'integer' })
   invoiceId!: number;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   amount!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })

@@ -23,11 +23,11 @@ export class Person {
   @Property({ type: 'text', columnType: 'text' })
   passwordHash!: string;
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   /** What an hour of theirs is paid; null where it is the shop's wage. */
-  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  @Property({ type: MoneyType, nullable: true })
   wagePerHour: Decimal | null = null;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

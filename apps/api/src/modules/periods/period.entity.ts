@@ -13,7 +13,7 @@ export class Period {
   @Property({ type: 'text', columnType: 'text' })
   toDay!: string;
 
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   totals!: unknown;
 
   @Property({ type: 'text', columnType: 'text' })

@@ -17,7 +17,7 @@ export class Posting {
   @Property({ type: 'text', columnType: 'text' })
   account!: 'receivables' | 'sales' | 'tax' | 'money';
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   amount!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })

@@ -13,25 +13,25 @@ export class Press {
   @Property({ type: 'text', columnType: 'text' })
   name!: string;
 
-  @Property({ type: LengthType, columnType: 'integer' })
+  @Property({ type: LengthType })
   bedWidthMm!: Decimal;
 
-  @Property({ type: LengthType, columnType: 'integer' })
+  @Property({ type: LengthType })
   bedDepthMm!: Decimal;
 
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   throatMm: Decimal | null = null;
 
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   shutHeightMm: Decimal | null = null;
 
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   ruleMm: Decimal | null = null;
 
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   reliefAreaMm2: Decimal | null = null;
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

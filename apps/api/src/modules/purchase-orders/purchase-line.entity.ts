@@ -30,7 +30,7 @@ export class PurchaseLine {
   received = 0;
 
   /** Nothing more of it is to come, although something is missing. */
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   closed = false;
 
   /** When the rest of it is awaited, where that is another day than the order's. */
@@ -38,6 +38,6 @@ export class PurchaseLine {
   expectedOn: string | null = null;
 
   /** Per ft², or per piece. */
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   unitPrice!: Decimal;
 }

@@ -14,13 +14,13 @@ export class QuoteBreak {
   @Property({ type: 'integer', columnType: 'integer' })
   quantity!: number;
 
-  @Property({ type: UnitPriceType, columnType: 'integer', nullable: true })
+  @Property({ type: UnitPriceType, nullable: true })
   typedPrice: Decimal | null = null;
 
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   priceEach!: Decimal;
 
   /** Pieces and tooling. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   total!: Decimal;
 }

@@ -37,22 +37,22 @@ export class Quote {
   state!: 'draft' | 'sent' | 'agreed' | 'declined' | 'superseded' | 'lapsed';
 
   /** RunInput of the domain, whole: the numbers can be worked out again from it alone. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   input!: unknown;
 
   /** RunNumbers of the domain. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   numbers!: unknown;
 
   /** What the owner set by hand in place of the shop's own values. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   overrides: { rejectPercent?: string; leatherPricePerFt2?: string } = {};
 
   @Property({ type: 'text', columnType: 'text' })
   message = '';
 
   /** QuoteTerms of the contract; empty in quotes of before there were any. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   terms: unknown = {};
 
   @Property({ type: 'text', columnType: 'text' })

@@ -29,7 +29,7 @@ export class ReceiptLine {
   quantity!: number;
 
   /** As the tannery stamped it on. */
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   markedAreaMm2: Decimal | null = null;
 
   /** The maker's own batch of hardware. */
@@ -37,11 +37,11 @@ export class ReceiptLine {
   batch!: string;
 
   /** What the goods cost. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   goods!: Decimal;
 
   /** Its share of freight and duty. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   carriage!: Decimal;
 
   /** The row of the ledger that put it on the rack. */

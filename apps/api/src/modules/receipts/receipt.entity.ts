@@ -19,10 +19,10 @@ export class Receipt {
   @Property({ type: 'text', columnType: 'text' })
   at!: string;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   freight!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   duty!: Decimal;
 
   /** What freight and duty are shared by. */
@@ -30,7 +30,7 @@ export class Receipt {
   sharedBy!: 'value' | 'area' | 'count';
 
   /** How far a side might miss its mark when it came. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   tolerancePercent!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })

@@ -35,7 +35,7 @@ export class StockMovement {
   quantity!: number;
 
   /** Signed, at cost. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   value!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })

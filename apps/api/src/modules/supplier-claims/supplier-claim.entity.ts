@@ -19,11 +19,11 @@ export class SupplierClaim {
   @Property({ type: 'text', columnType: 'text' })
   state!: 'open' | 'credited' | 'given up';
 
-  @Property({ type: AreaType, columnType: 'integer' })
+  @Property({ type: AreaType })
   missingAreaMm2!: Decimal;
 
   /** What was paid for the missing area. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   worth!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })
@@ -32,7 +32,7 @@ export class SupplierClaim {
   @Property({ type: 'text', columnType: 'text' })
   sentBy!: 'mail' | 'hand';
 
-  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  @Property({ type: MoneyType, nullable: true })
   credited: Decimal | null = null;
 
   /** Why it was given up. */

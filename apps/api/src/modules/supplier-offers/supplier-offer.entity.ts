@@ -36,10 +36,10 @@ export class SupplierOffer {
   multiple: number | null = null;
 
   /** `from` in mm² of leather or pieces of hardware, the price per ft² or piece. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   breaks!: OfferBreak[];
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   preferred!: boolean;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

@@ -23,7 +23,7 @@ export class Supplier {
   @Property({ type: 'text', columnType: 'text' })
   note = '';
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

@@ -13,10 +13,10 @@ export class TaxRate {
   @Property({ type: 'text', columnType: 'text' })
   name!: string;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   percent!: Decimal;
 
-  @Property({ type: 'boolean', columnType: 'integer' })
+  @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   active = true;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

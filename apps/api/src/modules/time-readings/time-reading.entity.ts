@@ -14,7 +14,7 @@ export class TimeReading {
   @Property({ type: 'text', columnType: 'text' })
   stepName!: string;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   seconds!: Decimal;
 
   @Property({ type: 'text', columnType: 'text' })

@@ -13,7 +13,7 @@ export class PlateOffer {
   @Property({ type: 'text', columnType: 'text' })
   metal!: 'steel' | 'magnesium' | 'copper' | 'brass';
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   price!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer' })

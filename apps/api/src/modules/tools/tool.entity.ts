@@ -23,7 +23,7 @@ export class Tool {
   @Property({ type: 'text', columnType: 'text' })
   metal: '' | 'steel' | 'magnesium' | 'copper' | 'brass' = '';
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   cost!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer' })
@@ -57,15 +57,15 @@ export class Tool {
   piecesPerStrike = 1;
 
   /** Of a die: its rule stands outside the outline by so much. */
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   ruleThicknessMm: Decimal | null = null;
 
   /** Of a plate: how far it stands out around the outline. */
-  @Property({ type: LengthType, columnType: 'integer', nullable: true })
+  @Property({ type: LengthType, nullable: true })
   borderMm: Decimal | null = null;
 
   /** Of a plate: what one impression presses into the leather. */
-  @Property({ type: AreaType, columnType: 'integer', nullable: true })
+  @Property({ type: AreaType, nullable: true })
   reliefAreaMm2: Decimal | null = null;
 
   @Property({ type: 'integer', columnType: 'integer', version: true })

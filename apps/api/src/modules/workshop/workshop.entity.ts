@@ -67,38 +67,38 @@ export class Workshop {
   timeZone = 'UTC';
 
   /** What a bench hour should leave, before wages. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   targetPerHour!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   wagePerHour!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer' })
   deskMinutesPerOrder = 45;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   packingPerOrder!: Decimal;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   rejectPercent!: Decimal;
 
   /** How sure a cut count must be that enough good pieces remain. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   confidencePercent!: Decimal;
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   priceStep!: Decimal;
 
-  @Property({ type: TimeType, columnType: 'integer' })
+  @Property({ type: TimeType })
   benchHoursPerDay!: Decimal;
 
-  @Property({ type: LengthType, columnType: 'integer' })
+  @Property({ type: LengthType })
   spacingMm!: Decimal;
 
-  @Property({ type: LengthType, columnType: 'integer' })
+  @Property({ type: LengthType })
   trimMm!: Decimal;
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   depositPercent!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer' })
@@ -108,34 +108,34 @@ export class Workshop {
   paymentTermDays = 30;
 
   /** Least that may be paid for an hour; nought where nobody said. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   minimumWagePerHour: Decimal = new Decimal(0);
 
   /** On top of all bench time, for rest. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   restPercent: Decimal = new Decimal(0);
 
   /** Rent, light, insurance, for each bench hour. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   overheadPerHour: Decimal = new Decimal(0);
 
-  @Property({ type: UnitPriceType, columnType: 'integer' })
+  @Property({ type: UnitPriceType })
   packingPerPiece: Decimal = new Decimal(0);
 
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   cardFeePercent: Decimal = new Decimal(0);
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   cardFeeEach: Decimal = new Decimal(0);
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   setUpCharge: Decimal = new Decimal(0);
 
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   minimumOrder: Decimal = new Decimal(0);
 
   /** How a price that nobody typed is worked out. */
-  @Property({ type: JsonText, columnType: 'text' })
+  @Property({ type: JsonText })
   priceRule: PriceRule = { kind: 'target' };
 
   /** How hardware and supplies are valued; a lot always stands at its own cost. */
@@ -153,19 +153,19 @@ export class Workshop {
   taxNumber = '';
 
   /** How far a side may miss the area marked on it. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   areaTolerancePercent: Decimal = new Decimal(3);
 
   /** How sure stock should last until a delivery comes. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   servicePercent: Decimal = new Decimal(95);
 
   /** Of placing one order with a supplier. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   orderCost: Decimal = new Decimal(10);
 
   /** Keeping a thing for a year costs this share of its price. */
-  @Property({ type: PercentType, columnType: 'integer' })
+  @Property({ type: PercentType })
   holdingPercent: Decimal = new Decimal(20);
 
   @Property({ type: 'integer', columnType: 'integer', version: true })
