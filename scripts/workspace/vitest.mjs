@@ -1,16 +1,18 @@
 import { mkdtempSync, existsSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
+import { ensureApiBuilt } from './api-build.mjs';
 import { inRoot } from './paths.mjs';
 import { run } from './run.mjs';
 
 const vitest = inRoot('node_modules', 'vitest', 'vitest.mjs');
 
 /**
- * Runs the tests of some projects, showing them as they go.
+ * Runs the tests of some projects, showing them as they go; those that start the program find it built.
  * @returns {Promise<{passed: number, failed: number, skipped: number}>}
  */
 export async function runTests(projects, { args = [], env = process.env } = {}) {
+  await ensureApiBuilt();
   const folder = mkdtempSync(path.join(tmpdir(), 'hidewright-tests-'));
   const report = path.join(folder, 'report.json');
   const chosen = projects.flatMap((project) => ['--project', project]);

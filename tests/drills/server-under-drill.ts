@@ -10,11 +10,12 @@ interface Server {
   kill: () => Promise<void>;
 }
 
-/** The API alone, as a process that can be killed; a planted defect is loaded before it. */
+/** The API alone, as built and as a process that can be killed; a planted defect is loaded before it. */
 export async function startServer(dataDir: string, planted?: string): Promise<Server> {
   const preload =
     planted === undefined ? [] : ['--import', path.join(import.meta.dirname, 'planted', planted)];
-  const child = spawn(process.execPath, ['--import', 'tsx', ...preload, 'src/server.ts'], {
+  const program = path.join(api, 'dist', 'server.mjs');
+  const child = spawn(process.execPath, [...preload, program], {
     cwd: api,
     env: {
       ...process.env,

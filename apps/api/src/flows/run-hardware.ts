@@ -11,20 +11,20 @@ interface Kind {
   unitPrice: string;
   parts: { hardwareId: number; name: string; unitPrice: string; quantity: number }[];
 }
-type Kinds = ReadonlyMap<number, Kind>;
+export type Kinds = ReadonlyMap<number, Kind>;
 type Line = PatternDefinition['hardware'][number];
 
-/** Each kind of hardware that the pattern or one of its options names, by its number. */
+/** Each kind of hardware that the patterns or one of their options name, by its number. */
 export async function hardwareKinds(
   { em }: Pick<Work, 'em'>,
-  definition: PatternDefinition,
+  definitions: readonly PatternDefinition[],
 ): Promise<Kinds> {
-  const ids = [
-    ...definition.hardware.map(({ hardwareId }) => hardwareId),
-    ...(definition.options ?? []).flatMap(({ swaps }) =>
+  const ids = definitions.flatMap(({ hardware, options = [] }) => [
+    ...hardware.map(({ hardwareId }) => hardwareId),
+    ...options.flatMap(({ swaps }) =>
       swaps.flatMap(({ byHardwareId }) => (byHardwareId === null ? [] : [byHardwareId])),
     ),
-  ];
+  ]);
   const kits = await kitsAmong(em, ids);
   const partIds = [...kits.values()].flat().map(({ hardwareId }) => hardwareId);
   const all = await em.find(Hardware, { id: { $in: [...ids, ...partIds] } });

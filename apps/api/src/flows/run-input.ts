@@ -10,10 +10,18 @@ import { invalid } from '../http/problem.ts';
 import { Leather } from '../modules/leathers/leather.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
-import { hardwareKinds, hardwareLine, optionsOf } from './run-hardware.ts';
+import { hardwareKinds, hardwareLine, optionsOf, type Kinds } from './run-hardware.ts';
 
 /** One rung, so that the input is whole before anything is asked. */
 const example = [{ quantity: 100, typedPrice: null }];
+
+/** What a run is of. */
+interface RunBasis {
+  definition: PatternDefinition;
+  layout: Layout;
+  /** The hardware it names, where that is at hand already. */
+  kinds?: Kinds | undefined;
+}
 
 /**
  * Everything that a quoted run's numbers are worked out from, with the prices and values of today, whole: kept with
@@ -22,11 +30,10 @@ const example = [{ quantity: 100, typedPrice: null }];
  */
 export async function runInputFor(
   work: Pick<Work, 'em'>,
-  definition: PatternDefinition,
-  layout: Layout,
+  { definition, layout, kinds }: RunBasis,
   asked: Pick<QuoteBody, 'breaks' | 'tooling' | 'overrides' | 'terms'>,
 ): Promise<RunInput> {
-  const stands = await runAsItStands(work, definition, layout);
+  const stands = await runAsItStands(work, { definition, layout, kinds });
   requireOptions(stands, asked.terms.options);
   return runAsAsked(stands, asked);
 }
@@ -34,12 +41,11 @@ export async function runInputFor(
 /** A run of a pattern before anybody asks for quantities or terms of their own. */
 export async function runAsItStands(
   work: Pick<Work, 'em'>,
-  definition: PatternDefinition,
-  layout: Layout,
+  { definition, layout, kinds: known }: RunBasis,
 ): Promise<RunAsItStands> {
   const workshop = await work.em.findOneOrFail(Workshop, 1);
   const leather = await work.em.findOneOrFail(Leather, definition.leatherId);
-  const kinds = await hardwareKinds(work, definition);
+  const kinds = known ?? (await hardwareKinds(work, [definition]));
   return {
     options: optionsOf(definition, kinds),
     input: {

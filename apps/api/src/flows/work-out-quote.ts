@@ -41,7 +41,7 @@ export async function workOutQuote(
     patternId: laid.patternId,
     customerId: asked.customerId,
   });
-  const input = await runInputFor(work, definition, laid.worked.layout, asked);
+  const input = await runInputFor(work, { definition, layout: laid.worked.layout }, asked);
   return {
     customerId: asked.customerId,
     patternVersionId: laid.versionId,

@@ -2,7 +2,7 @@ import type { CheckAnswer } from '@hidewright/contract';
 import { checkRuns, type RunFacts, type ShopStock } from '@hidewright/domain';
 import type { Work } from '../../work.ts';
 import type { Tool } from '../../modules/tools/tool.entity.ts';
-import { finishedWords } from './finished-for-check.ts';
+import { finishedOf, finishedWords } from './finished-for-check.ts';
 import { freeLotRows } from './leather-for-check.ts';
 import { loadShopStock } from './load-shop-stock.ts';
 import { needsOf, toolsOf, toToolStock } from './needs-of-runs.ts';
@@ -39,11 +39,12 @@ export async function checkPlanned(
   );
   const shop = { ...stock, tools: once(tools.flatMap((each) => each.tools)).map(toToolStock) };
   const facts = checkRuns(shop, needs);
+  const there = await finishedOf(em, planned);
   const runs = await inTurn(planned, async (run, at) => ({
     planned: run,
     facts: facts[at] as RunFacts,
     press: await pressForCheck(em, run, tools[at]?.tools ?? []),
-    finished: await finishedWords(em, run),
+    finished: finishedWords(there, run),
   }));
   return { shop, runs };
 }

@@ -4,16 +4,25 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { readFinishedList } from '../../modules/finished-pieces/read-finished.ts';
 import type { PlannedRun } from './runs-asked.ts';
 
-/** "24 finished ones are on the shelf, tray 3.": pieces of the same kind that this customer could have. */
-export async function finishedWords(
+/** What lies finished of the runs' patterns, some 200 kinds of each at most. */
+export function finishedOf(
   em: EntityManager,
+  planned: readonly PlannedRun[],
+): Promise<FinishedPiece[]> {
+  const patternId = [...new Set(planned.map(({ plan }) => plan.patternId))];
+  return readFinishedList(em, { patternId, there: 'yes', limit: 200 * patternId.length });
+}
+
+/** "24 finished ones are on the shelf, tray 3.": pieces of the same kind that this customer could have. */
+export function finishedWords(
+  there: readonly FinishedPiece[],
   { plan, option, customerId }: PlannedRun,
-): Promise<string[]> {
-  const { patternId } = plan;
-  const there = await readFinishedList(em, { patternId, there: 'yes', limit: 200 });
+): string[] {
   const alike = there.filter(
     (piece) =>
-      piece.option === option && (piece.customerId === null || piece.customerId === customerId),
+      piece.patternId === plan.patternId &&
+      piece.option === option &&
+      (piece.customerId === null || piece.customerId === customerId),
   );
   const said = (sort: FinishedPiece['sort'], words: [one: string, more: string]) => {
     const of = alike.filter((piece) => piece.sort === sort);

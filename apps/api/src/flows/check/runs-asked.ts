@@ -10,6 +10,7 @@ import { numbersOfQuote } from '../../modules/quotes/quote-numbers.ts';
 import { Quote } from '../../modules/quotes/quote.entity.ts';
 import type { Work } from '../../work.ts';
 import { layPattern, type LaidPattern } from '../lay-pattern.ts';
+import { hardwareKinds, type Kinds } from '../run-hardware.ts';
 import { runInputFor } from '../run-input.ts';
 import { planOf, planRun, type RunPlan } from '../run-plan.ts';
 
@@ -62,13 +63,15 @@ export async function planAskedRuns(
   laid: readonly (LaidPattern | null)[],
 ): Promise<PlannedRun[]> {
   const planned: PlannedRun[] = [];
+  const definitions = laid.flatMap((pattern) => (pattern === null ? [] : [pattern.definition]));
+  const kinds = await hardwareKinds(work, definitions);
   for (const [at, run] of runs.entries()) {
     const field = `runs.${at}`;
     const pattern = laid[at] ?? null;
     planned.push(
       pattern === null
         ? await planQuoted(work, await askedQuote(work.em, run, field), run, field)
-        : await planPattern(work, pattern, run, field),
+        : await planPattern(work, { ...pattern, kinds }, run, field),
     );
   }
   return planned;
@@ -128,19 +131,20 @@ function requireOption(quote: Quote, option: string | null, field: string): void
 
 async function planPattern(
   work: Work,
-  laid: LaidPattern,
+  laid: LaidPattern & { kinds: Kinds },
   { quantity, option = null, by }: AskedRun,
   field: string,
 ): Promise<PlannedRun> {
   const day = by ?? addWorkdays(work.today, 10);
   requireReachable(work, day, within(field, 'by'));
-  const { definition, worked } = laid;
+  const { definition, worked, kinds } = laid;
+  const { layout } = worked;
   const options = option === null ? [] : [{ name: option, typedExtra: null }];
   const terms = quoteTerms.parse({ options });
   const pieces = quantity ?? 1;
   const breaks = [{ quantity: pieces, typedPrice: null, rule: null }];
   const asked = { breaks, tooling: [], overrides: {}, terms };
-  const input = await runInputFor(work, definition, worked.layout, asked).catch(
+  const input = await runInputFor(work, { definition, layout, kinds }, asked).catch(
     (error: unknown) => {
       if (!(error instanceof Problem)) throw error;
       throw invalid([{ field: within(field, 'option'), message: error.message }]);
@@ -160,7 +164,7 @@ async function planPattern(
       option,
     }),
     definition,
-    sides: sidesOf(worked.layout.container),
+    sides: sidesOf(layout.container),
   };
 }
 

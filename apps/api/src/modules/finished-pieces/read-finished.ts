@@ -8,7 +8,7 @@ import { notFound } from '../../http/problem.ts';
 interface Asked {
   id?: number | undefined;
   below?: number | undefined;
-  patternId?: number | undefined;
+  patternId?: number | readonly number[] | undefined;
   there?: 'yes' | 'no' | undefined;
   q?: string | undefined;
   limit: number;
@@ -33,7 +33,10 @@ export async function readFinishedList(em: EntityManager, asked: Asked): Promise
   const { where, values } = whereAll([
     ...when(asked.id, 'f.id = ?'),
     ...when(asked.below, 'f.id < ?'),
-    ...when(asked.patternId, 'f.pattern_id = ?'),
+    ...when(
+      asked.patternId === undefined ? undefined : JSON.stringify([asked.patternId].flat()),
+      'f.pattern_id IN (SELECT value FROM json_each(?))',
+    ),
     ...when(asked.there, '(f.on_hand > 0) = ?', (there) => [there === 'yes' ? 1 : 0]),
     ...when(asked.q, '(p.name LIKE ? OR c.name LIKE ?)', (q) => [`%${q}%`, `%${q}%`]),
   ]);

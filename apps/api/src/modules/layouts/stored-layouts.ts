@@ -90,8 +90,12 @@ async function workedOnce<Source, Laid>(
   inputHash: string,
   workOut: () => Promise<Laid>,
 ): Promise<Worked<Source, Laid>> {
-  const stored = await orm.em.fork().findOne(StoredLayout, { inputHash });
-  const layout = stored === null ? await workOut() : (stored.result as Laid);
+  // What went in may be as long as the layout, and is at hand.
+  const [stored] = await orm.em.execute<{ result: string }[]>(
+    'SELECT result FROM layout WHERE input_hash = ?',
+    [inputHash],
+  );
+  const layout = stored === undefined ? await workOut() : (JSON.parse(stored.result) as Laid);
   return { inputHash, source, layout };
 }
 

@@ -29,7 +29,7 @@ export function runBasisRoute(router: Router, context: Context): void {
         outlinePath: pathOf({ input: laid.worked.source }),
         needsDie: laid.definition.needsDie,
         needsPlate: laid.definition.needsPlate,
-        ...(await runAsItStands(work, definition, laid.worked.layout)),
+        ...(await runAsItStands(work, { definition, layout: laid.worked.layout })),
       };
     },
     ({ params }) => layPattern(context, params.id, notFound('pattern')),
