@@ -3,6 +3,7 @@ import path from 'node:path';
 import { MikroORM } from '@mikro-orm/sqlite';
 import type { LotLayout } from '@hidewright/contract';
 import { pino, type Logger } from 'pino';
+import type { Piscina } from 'piscina';
 import { databaseFile, type Config } from './config.ts';
 import { assertSound } from './db/sound.ts';
 import { ormConfig } from './mikro-orm.config.ts';
@@ -28,11 +29,17 @@ export interface Context {
   searches: Searches<LotLayout>;
 }
 
-/** Opens the data folder and what lies in it; `clock` is the system's unless a test or the demo brings its own. */
+/** What a test or the making of a demo brings of its own. */
+interface Brought {
+  clock?: Clock;
+  synchronous?: 'FULL' | 'OFF';
+  pool?: Piscina;
+}
+
+/** Opens the data folder and what lies in it. */
 export async function createContext(
   config: Config,
-  clock: Clock = systemClock,
-  synchronous: 'FULL' | 'OFF' = 'FULL',
+  { clock = systemClock, synchronous = 'FULL', pool }: Brought = {},
 ): Promise<Context> {
   await mkdir(config.dataDir, { recursive: true });
   const orm = await MikroORM.init(ormConfig(databaseFile(config.dataDir), synchronous));
@@ -50,7 +57,7 @@ export async function createContext(
     mailer: connectMail(config),
     files: new FileStore(path.join(config.dataDir, 'files')),
     papers,
-    workers: startWorkers(config),
+    workers: startWorkers(config, pool),
     searches: new Searches(),
   };
 }

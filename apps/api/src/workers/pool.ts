@@ -28,8 +28,9 @@ export interface Workers {
   close(): Promise<void>;
 }
 
-export function startWorkers(config: Config): Workers {
-  const pool = new Piscina({
+/** Threads that wait for work, at most two. */
+export const startPool = (): Piscina =>
+  new Piscina({
     filename: new URL('./entry.mjs', import.meta.url).href,
     // The worker brings its own loader; the parent's would load it a second time.
     execArgv: [],
@@ -37,6 +38,10 @@ export function startWorkers(config: Config): Workers {
     maxThreads: Math.max(1, Math.min(2, os.availableParallelism())),
     idleTimeout: 60_000,
   });
+
+/** @param shared a pool that others use as well, and that stays open when these close */
+export function startWorkers(config: Config, shared?: Piscina): Workers {
+  const pool = shared ?? startPool();
   const database = databaseFile(config.dataDir);
   return {
     layOut: async (input) => layoutOf<Layout>(await pool.run(input, { name: 'layOut' })),
@@ -51,7 +56,9 @@ export function startWorkers(config: Config): Workers {
     salesSheet: (period) =>
       pool.run({ ...period, database }, { name: 'salesSheet' }) as Promise<Uint8Array>,
     listSheet: (sheet) => pool.run(sheet, { name: 'listSheet' }) as Promise<Uint8Array>,
-    close: () => pool.close(),
+    close: async () => {
+      if (shared === undefined) await pool.close();
+    },
   };
 }
 

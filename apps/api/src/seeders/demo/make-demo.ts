@@ -39,7 +39,7 @@ async function playYear(config: Config): Promise<void> {
   const end = config.demoDay ?? dayIn('UTC', systemClock.now());
   const year = new Year(end);
   const clock = new SetClock(new Date(`${year.day(380)}T08:00:00.000Z`));
-  const context = await createContext(config, clock, 'OFF');
+  const context = await createContext(config, { clock, synchronous: 'OFF' });
   try {
     const shop = new DemoShop(context, clock);
     const furnished = await furnish(shop);
