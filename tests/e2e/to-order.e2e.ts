@@ -30,6 +30,15 @@ walk('the maker reads on a phone what is to be ordered, without prices', async (
   await expectNoOverflow(page);
   expect(await page.getByText(/USD/).count()).toBe(0);
   expect(await page.getByRole('button', { name: /draft/i }).count()).toBe(0);
+
+  const places = page.getByRole('navigation', { name: 'Stockroom' });
+  await places.getByText('Stockroom: To order').click();
+  await expectAccessible(page);
+  await expectNoOverflow(page);
+  await places.getByRole('link', { name: 'On hand' }).click();
+  await page.getByRole('heading', { level: 1, name: 'On hand' }).waitFor();
+  await places.getByText('Stockroom: On hand').waitFor();
+  expect(await places.getByRole('link').count(), 'folded up again').toBe(0);
 });
 
 walk('the owner sees why, changes a quantity, drafts it and sends the order', async ({ page }) => {
