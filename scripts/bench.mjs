@@ -1,7 +1,7 @@
 import { spawn } from 'node:child_process';
 import { existsSync, readdirSync } from 'node:fs';
 import { createInterface } from 'node:readline';
-import { ensureApiBuilt } from './workspace/api-build.mjs';
+import { ensureProgramsBuilt } from './workspace/programs-build.mjs';
 import { ensureInstalled } from './workspace/installed.mjs';
 import { inRoot } from './workspace/paths.mjs';
 
@@ -63,7 +63,7 @@ if (name !== undefined && !existsSync(`${folder}/${name}.bench.ts`)) {
   process.exit(2);
 }
 const installSeconds = await ensureInstalled();
-await ensureApiBuilt();
+await ensureProgramsBuilt();
 const figures = [];
 for (const bench of name === undefined ? known() : [name]) {
   const env = { ...process.env, INSTALL_SECONDS: String(installSeconds) };

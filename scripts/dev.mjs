@@ -3,6 +3,7 @@ import { apiFolder, withAbsolutePaths } from './workspace/launch.mjs';
 import { startMailbox } from './workspace/mailbox.mjs';
 import { watchParent } from './workspace/parent.mjs';
 import { inRoot } from './workspace/paths.mjs';
+import { ensureProgramsBuilt } from './workspace/programs-build.mjs';
 import { startService } from './workspace/service.mjs';
 import { readSettings } from './workspace/settings.mjs';
 
@@ -27,6 +28,7 @@ const env = {
   DATA_DIR: settings.dataDir,
 };
 if (settings.mode === 'demo' && !env.SMTP_URL) {
+  await ensureProgramsBuilt();
   const mailbox = await startMailbox(settings.dataDir, env);
   services.push(mailbox);
   Object.assign(env, { SMTP_URL: mailbox.smtp, MAILBOX_URL: mailbox.web });

@@ -1,4 +1,4 @@
-import { ensureApiBuilt } from './workspace/api-build.mjs';
+import { ensureProgramsBuilt } from './workspace/programs-build.mjs';
 import { ensureInstalled } from './workspace/installed.mjs';
 import { apiFolder, apiProgram, withAbsolutePaths } from './workspace/launch.mjs';
 import { openLog } from './workspace/log-file.mjs';
@@ -61,7 +61,7 @@ async function start() {
   const settings = await readSettings(process.argv.slice(2), process.env);
   await ensureInstalled();
   await ensureWebBuilt();
-  await ensureApiBuilt();
+  await ensureProgramsBuilt();
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0));
   watchParent(() => void end(0));
 

@@ -1,5 +1,5 @@
 import path from 'node:path';
-import { ensureApiBuilt } from './api-build.mjs';
+import { ensureProgramsBuilt } from './programs-build.mjs';
 import { ensureInstalled } from './installed.mjs';
 import { inRoot } from './paths.mjs';
 import { become } from './run.mjs';
@@ -17,7 +17,7 @@ export function withAbsolutePaths(env = process.env) {
 
 export const apiFolder = inRoot('apps', 'api');
 
-/** How Node starts one of the API's programs as built: `ensureApiBuilt` comes first. */
+/** How Node starts one of the API's programs as built: `ensureProgramsBuilt` comes first. */
 export function apiProgram(name) {
   return ['--enable-source-maps', path.join('dist', `${name}.mjs`)];
 }
@@ -25,7 +25,7 @@ export function apiProgram(name) {
 /** Installs and builds when needed, then becomes one of the API's programs, with a data folder as its argument. */
 export async function launchApiProgram(name, args) {
   await ensureInstalled();
-  await ensureApiBuilt();
+  await ensureProgramsBuilt();
   become(process.execPath, [...apiProgram(name), ...args], {
     cwd: apiFolder,
     env: withAbsolutePaths(),

@@ -5,7 +5,7 @@ import { startService } from './service.mjs';
 export function startMailbox(dataDir, env) {
   return new Promise((resolve, reject) => {
     const faults = [];
-    const service = startService(process.execPath, ['--import', 'tsx', 'src/mailbox.ts'], {
+    const service = startService(process.execPath, ['--enable-source-maps', 'dist/mailbox.mjs'], {
       cwd: inRoot('apps', 'stand-ins'),
       env: { ...env, DATA_DIR: dataDir },
       onLine: (line) => resolve({ ...JSON.parse(line), ...service }),

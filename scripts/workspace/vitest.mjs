@@ -1,7 +1,7 @@
 import { mkdtempSync, existsSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
-import { ensureApiBuilt } from './api-build.mjs';
+import { ensureProgramsBuilt } from './programs-build.mjs';
 import { inRoot } from './paths.mjs';
 import { run } from './run.mjs';
 
@@ -12,7 +12,7 @@ const vitest = inRoot('node_modules', 'vitest', 'vitest.mjs');
  * @returns {Promise<{passed: number, failed: number, skipped: number}>}
  */
 export async function runTests(projects, { args = [], env = process.env } = {}) {
-  await ensureApiBuilt();
+  await ensureProgramsBuilt();
   const folder = mkdtempSync(path.join(tmpdir(), 'hidewright-tests-'));
   const report = path.join(folder, 'report.json');
   const chosen = projects.flatMap((project) => ['--project', project]);
