@@ -92,6 +92,8 @@ const shortForRuns = z
     /** What must be bought for them, beside what is on order; and how much of that is on a draft. */
     buy: z.string(),
     drafted: z.string(),
+    /** What to order beyond that, as its supplier sells it: packs, minimum, a break that costs less; of leather with its waste. */
+    toOrder: z.string(),
     drafts: z.array(paperNumber),
     supplierName: z.string().nullable(),
     /** The customer brings it: it is not bought. */
@@ -198,7 +200,7 @@ export const draftShort = endpoint({
   body: askedRuns,
   reply: z.object({
     orders: z.array(purchaseOrder),
-    /** What was not drafted, and why: it is on a draft already, or nobody is named who sells it. */
+    /** What was not drafted and why, and where a price break makes more of it cost less. */
     notes: z.array(z.string()),
   }),
 });

@@ -1,5 +1,5 @@
 import type { BodyOf, draftSuggested, PurchaseLineTyped } from '@hidewright/contract';
-import { addDays, Exact } from '@hidewright/domain';
+import { Exact } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
 import { priceText } from '../http/decimal-text.ts';
@@ -11,6 +11,7 @@ import {
 import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts';
 import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
 import type { Work } from '../work.ts';
+import { boughtLine } from './order-suggestions/bought-line.ts';
 import { suggestOrders, type Suggested } from './order-suggestions/suggest-orders.ts';
 
 type AskedLine = BodyOf<typeof draftSuggested>['lines'][number];
@@ -86,10 +87,10 @@ async function putOnDraft(
     await changeDraft(work, draft, { lines });
     return draft.id;
   }
-  const leadDays = Math.max(...wanted.map(({ item }) => Math.round(item.lead.meanDays)));
+  const days = wanted.flatMap(({ item }) => item.sold.arrivesOn ?? []).sort();
   const made = await draftPurchaseOrder(work, {
     supplierId,
-    expectedOn: addDays(work.today, leadDays),
+    expectedOn: days.at(-1) ?? null,
     note: '',
     lines: wanted.reduce(withWanted, []),
   });
@@ -128,15 +129,8 @@ function withWanted(
       : asked.of === 'hardware' && line.hardwareId === asked.id,
   );
   const there = lines[at];
-  if (there === undefined) return [...lines, lineFor(item, asked.quantity)];
+  if (there === undefined) return [...lines, boughtLine(item.row, item.sold.terms, asked.quantity)];
   const before = there.of === 'leather' ? there.areaMm2 : there.quantity;
-  return lines.with(at, lineFor(item, new Exact(before).plus(asked.quantity).toFixed()));
-}
-
-function lineFor({ row, sold }: Suggested, quantity: string): PurchaseLineTyped {
-  const reached = sold.terms.breaks.findLast(({ from }) => new Exact(from).lte(quantity));
-  const unitPrice = priceText(new Decimal((reached ?? sold.terms.breaks[0])?.price ?? '0'));
-  return row.of === 'leather'
-    ? { of: 'leather', leatherId: row.id, areaMm2: quantity, unitPrice }
-    : { of: 'hardware', hardwareId: row.id, quantity: Number(quantity), unitPrice };
+  const both = new Exact(before).plus(asked.quantity).toFixed();
+  return lines.with(at, boughtLine(item.row, item.sold.terms, both));
 }

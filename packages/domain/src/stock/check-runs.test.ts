@@ -21,13 +21,23 @@ import {
 
 const today = '2026-12-01';
 const say: Say = { area: (area) => `${area.toFixed()} mm²`, day: (day) => day };
+const inHundreds = { minimum: null, multiple: '100', breaks: [{ from: '0', price: '0.20' }] };
 const fittings: Sourcing = {
+  supplierId: 5,
   supplier: 'Fennbridge Fittings',
   arrivesOn: '2026-12-04',
+  terms: inHundreds,
   drafted: 0,
   drafts: [],
 };
-const nobody: Sourcing = { supplier: null, arrivesOn: null, drafted: 0, drafts: [] };
+const nobody: Sourcing = {
+  supplierId: null,
+  supplier: null,
+  arrivesOn: null,
+  terms: { ...inHundreds, multiple: null },
+  drafted: 0,
+  drafts: [],
+};
 
 const lot = (lotId: number, panels: number, change: Partial<RackLot> = {}): RackLot => ({
   lotId,
@@ -47,7 +57,6 @@ const rivets = (free: number, change: Partial<ItemStock> = {}): ItemStock => ({
   hardwareId: 7,
   name: 'Rivet',
   kind: 'hardware',
-  packSize: 100,
   pool: { free, receipts: [], promised: [] },
   buying: fittings,
   ...change,

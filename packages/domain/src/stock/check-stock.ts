@@ -4,13 +4,17 @@ import type { Day } from '../promise/day.ts';
 import type { HeldWork } from '../promise/held-work.ts';
 import type { CutFrom, LotToCut } from './pieces-from-lot.ts';
 import type { PromisePool } from './promise-pool.ts';
+import type { OfferTerms } from './supplier-offer.ts';
 
 /** Where more of an item comes from. */
 export interface Sourcing {
-  /** null where nobody is named who sells it */
+  /** both null where nobody is named who sells it */
+  supplierId: number | null;
   supplier: string | null;
   /** when it is here if it is ordered today; null where nobody is named */
   arrivesOn: Day | null;
+  /** as they sell it; leather in mm² and by the ft² */
+  terms: OfferTerms;
   /** drafted for it and not sent yet: pieces, or thousandths of mm² */
   drafted: number;
   /** the numbers of those drafts */
@@ -30,7 +34,6 @@ export interface ItemStock {
   hardwareId: number;
   name: string;
   kind: 'hardware' | 'supplies';
-  packSize: number;
   /** the customer brings it: it is never bought */
   fromCustomer?: boolean;
   /** in the order in which they are offered; their parts are among the shop's items */

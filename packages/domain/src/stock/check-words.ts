@@ -7,7 +7,7 @@ import type { LeatherFacts, LotTaken } from './check-leather.ts';
 import type { HoursFacts } from './check-runs.ts';
 import type { Sourcing } from './check-stock.ts';
 import type { ToolFacts } from './check-tools.ts';
-import { leatherToBuy } from './what-to-buy.ts';
+import { amountToBuy, leatherToBuy, packsOf, type ToBuy } from './what-to-buy.ts';
 
 /** How the shop says areas and days. */
 export interface Say {
@@ -28,16 +28,23 @@ export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): strin
   }
   const head = `${item.name}: ${pieces(needed)} needed, ${pieces(free)} free, ${pieces(short)} short.`;
   const missing = standing.buy - standing.drafted;
-  const buy =
-    item.packSize <= 1
-      ? `Buy ${pieces(missing)}, or receive them if they are here.`
-      : `Buy ${packs(Math.ceil(missing / item.packSize), item.packSize)}, or receive them if they are here.`;
   return [
     head,
-    ...remedy(standing, item.buying, missing > 0 ? buy : null, say),
+    ...remedy(standing, item.buying, missing > 0 ? buyWords(item, missing) : null, say),
     ...standInWords({ item, ...standing }),
   ].join(' ');
 }
+
+function buyWords({ buying: { terms } }: ItemFacts['item'], missing: number): string {
+  const toBuy = amountToBuy(terms, String(missing));
+  const [count, size] = [packsOf(terms, toBuy.quantity), Number(terms.multiple)];
+  const amount = count === null ? countWords(toBuy.quantity) : packs(count, size);
+  return `Buy ${amount}${breakWords(toBuy)}, or receive them if they are here.`;
+}
+
+/** Why it is more than is short; never what it costs. */
+const breakWords = ({ quantity, plain }: ToBuy): string =>
+  quantity === plain ? '' : ' (the price breaks there)';
 
 /** Of what the customer brings, nothing is bought: they are asked for it. */
 function customerWords({ item, ...standing }: ItemFacts, say: Say): string {
@@ -82,14 +89,18 @@ export function leatherWords(facts: LeatherFacts, say: Say): string {
   }
   const { needed, free, short } = standing;
   const head = `${leather.name}: ${area(needed)} needed, ${area(free)} free, ${area(short)} short.`;
-  const buying = leatherToBuy(leather, standing.buy - standing.drafted);
-  const amount =
-    buying.whole === null
-      ? `about ${say.area(new Exact(buying.areaMm2))} more`
-      : `${buying.whole.count} more ${wholes(buying.whole)}`;
-  const buy =
-    standing.buy > standing.drafted ? `Buy ${amount}, or receive it if it is here.` : null;
+  const missing = standing.buy - standing.drafted;
+  const buy = missing > 0 ? buyLeatherWords(leather, missing, say) : null;
   return [head, ...remedy(standing, leather.buying, buy, say), ...shades].join(' ');
+}
+
+function buyLeatherWords(leather: LeatherFacts['leather'], missing: number, say: Say): string {
+  const toBuy = leatherToBuy(leather, missing);
+  const amount =
+    toBuy.whole === null
+      ? `about ${say.area(new Exact(toBuy.quantity))} more`
+      : `${toBuy.whole.count} more ${wholes(toBuy.whole)}`;
+  return `Buy ${amount}${breakWords(toBuy)}, or receive it if it is here.`;
 }
 
 /** "side", "hides", "bellies". */

@@ -1,7 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { comingWeeks } from './coming-weeks.ts';
-import { leatherToBuy, packsToBuy } from './what-to-buy.ts';
 
 describe('comingWeeks', () => {
   it('tells the days on which something comes or goes, and the day it runs out', () => {
@@ -38,30 +37,5 @@ describe('comingWeeks', () => {
         expect(days.at(-1)?.left ?? free).toBe(end);
       }),
     );
-  });
-});
-
-describe('what to buy', () => {
-  it('is enough to cut the area from, in whole sides where it comes in sides', () => {
-    const usable = 1_700_000_000;
-    expect(leatherToBuy({ whole: null, usablePercent: '85' }, usable)).toEqual({
-      areaMm2: '2000000',
-      whole: null,
-    });
-    const whole = { form: 'side', areaMm2: '2000000' };
-    expect(leatherToBuy({ whole, usablePercent: '85' }, usable).whole).toEqual({
-      count: 1,
-      form: 'side',
-    });
-    expect(leatherToBuy({ whole, usablePercent: '85' }, usable + 1)).toEqual({
-      areaMm2: '4000000',
-      whole: { count: 2, form: 'side' },
-    });
-  });
-
-  it('comes in full packs', () => {
-    expect(packsToBuy(100, 110)).toEqual({ packs: 2, pieces: 200 });
-    expect(packsToBuy(1, 110)).toEqual({ packs: 110, pieces: 110 });
-    expect(packsToBuy(50, 0)).toEqual({ packs: 0, pieces: 0 });
   });
 });

@@ -1,36 +1,73 @@
-import { type DecimalText, Exact, toAtMost } from '../numbers/decimal-text.ts';
+import { type DecimalText, Exact, toAtMost, toText } from '../numbers/decimal-text.ts';
+import { MM2_PER_FT2 } from '../units/measures.ts';
+import { bestBuy } from './best-buy.ts';
 import type { LeatherStock } from './check-stock.ts';
+import type { OfferTerms } from './supplier-offer.ts';
 
-export interface LeatherToBuy {
-  /** as it is bought, waste and all */
-  areaMm2: DecimalText;
-  /** whole sides or hides, where it is known what it is bought as */
+/** What is bought of a thing so that enough of it comes; quantities in pieces, or in mm². */
+export interface ToBuy {
+  quantity: DecimalText;
+  /** the least that is sold and would do; below `quantity` where a price break makes more cost less */
+  plain: DecimalText;
+  /** what could be had for the same money; null where nothing more is */
+  sameCost: DecimalText | null;
+}
+
+export interface LeatherToBuy extends ToBuy {
+  /** whole sides or hides, where it is known what it is bought as and they come out even */
   whole: { count: number; form: string } | null;
 }
 
 /**
- * What to buy so that an area can be cut: its usable share is less than all of it, and it comes in whole sides or
- * hides where the shop said so.
- * @param usable thousandths of mm² to cut
+ * What to buy of a thing as its supplier sells it: at least the minimum, in full packs, and on to a price break that
+ * costs less in total (`bestBuy`).
+ * @param needed above 0
+ * @param pricedAmount how much of it one price is for
+ * @throws InvalidInput
  */
-export function leatherToBuy(
-  { whole, usablePercent }: Pick<LeatherStock, 'whole' | 'usablePercent'>,
-  usable: number,
-): LeatherToBuy {
-  const gross = new Exact(usable).div(1000).times(100).div(usablePercent);
-  if (whole === null) {
-    return { areaMm2: toAtMost(gross.toDecimalPlaces(3, Exact.ROUND_UP), 3), whole: null };
-  }
-  // The 20th place keeps a division's last digit from costing a side.
-  const count = gross.div(whole.areaMm2).toDecimalPlaces(20).ceil().toNumber();
+export function amountToBuy(
+  terms: OfferTerms,
+  needed: DecimalText,
+  pricedAmount: DecimalText = '1',
+): ToBuy {
+  const offers = [{ ...terms, id: 0, leadDays: 0, preferred: true }];
+  const [buy] = bestBuy({ needed, pricedAmount, offers });
+  if (buy === undefined) throw new Error('One offer is asked, and one is answered');
+  const { plain, next, best } = buy;
+  const paid = !new Exact(plain.cost).isZero();
+  const same = next !== null && paid && new Exact(next.cost).eq(best.cost) ? next.quantity : null;
   return {
-    areaMm2: toAtMost(new Exact(whole.areaMm2).times(count), 3),
-    whole: { count, form: whole.form },
+    quantity: best.quantity,
+    plain: plain.quantity,
+    sameCost: same === best.quantity ? null : same,
   };
 }
 
-/** Pieces to buy, in full packs. */
-export function packsToBuy(packSize: number, pieces: number): { packs: number; pieces: number } {
-  const packs = Math.ceil(pieces / packSize);
-  return { packs, pieces: packs * packSize };
+/**
+ * What to buy so that an area can be cut: its usable share is less than all of it, and it comes as it is sold.
+ * @param usable thousandths of mm² to cut, above 0
+ * @throws InvalidInput
+ */
+export function leatherToBuy(
+  { whole, usablePercent, buying }: Pick<LeatherStock, 'whole' | 'usablePercent' | 'buying'>,
+  usable: number,
+): LeatherToBuy {
+  const gross = new Exact(usable).div(1000).times(100).div(usablePercent);
+  const needed = toAtMost(gross.toDecimalPlaces(3, Exact.ROUND_UP), 3);
+  const toBuy = amountToBuy(buying.terms, needed, MM2_PER_FT2);
+  return { ...toBuy, whole: whole === null ? null : wholesOf(whole, toBuy.quantity) };
+}
+
+function wholesOf(
+  { areaMm2, form }: NonNullable<LeatherStock['whole']>,
+  quantity: DecimalText,
+): LeatherToBuy['whole'] {
+  if (!new Exact(quantity).mod(areaMm2).isZero()) return null;
+  return { count: new Exact(quantity).div(areaMm2).toNumber(), form };
+}
+
+/** How many full packs that is; null where any number is sold. */
+export function packsOf({ multiple }: OfferTerms, quantity: DecimalText): number | null {
+  if (multiple === null || new Exact(multiple).lte(1)) return null;
+  return Number(toText(new Exact(quantity).div(multiple)));
 }

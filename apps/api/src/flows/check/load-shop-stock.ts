@@ -1,9 +1,10 @@
 import { usableOf, type ItemStock, type LeatherStock, type ShopStock } from '@hidewright/domain';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
-import { Supplier } from '../../modules/suppliers/supplier.entity.ts';
 import type { Work } from '../../work.ts';
 import { benchToday, openJobs } from '../bench-load.ts';
+import { readItemSources, type ItemSource } from '../order-suggestions/item-sources.ts';
+import { boughtHardware, boughtLeather } from './bought-rows.ts';
 import { toRackLot, type LotRow } from './leather-for-check.ts';
 import { buyingFrom, readOnOrder, type OnOrder, type Wanted } from './on-order.ts';
 import { readOwedToJobs, type OwedToJobs } from './owed-to-jobs.ts';
@@ -20,14 +21,10 @@ export async function loadShopStock(
   const standIns = await readStandIns(em, wanted.hardwareIds);
   const hardwareIds = [...new Set([...wanted.hardwareIds, ...standIns.partIds])];
   const kinds = await em.find(Hardware, { id: { $in: hardwareIds } });
-  const suppliers = await em.find(Supplier, {
-    id: { $in: [...leathers, ...kinds].flatMap(({ supplierId }) => supplierId ?? []) },
-  });
+  const sourceOf = await readItemSources(em, today, { ...wanted, hardwareIds });
   const onOrder = await readOnOrder(em, today, { ...wanted, hardwareIds });
   const owed = await readOwedToJobs(em);
   const free = await freeHardware(work, hardwareIds);
-  const sellerOf = ({ supplierId }: { supplierId: number | null }) =>
-    suppliers.find(({ id }) => id === supplierId);
   return {
     today,
     bench: await benchToday(work),
@@ -37,23 +34,17 @@ export async function loadShopStock(
         lots: lots.filter((row) => row.leather_id === leather.id).map(toRackLot),
         owed: owed.leather(leather.id),
         onOrder: onOrder({ leatherId: leather.id }),
-        seller: sellerOf(leather),
-        today,
+        source: sourceOf(boughtLeather(leather)),
       }),
     ),
     items: kinds.map((kind) => ({
       hardwareId: kind.id,
       name: kind.name,
       kind: kind.kind,
-      packSize: kind.packSize,
       fromCustomer: kind.fromCustomer,
       standIns: standIns.of(kind.id),
       ...poolOf(kind.id, free, owed, onOrder({ hardwareId: kind.id })),
-      buying: buyingFrom(
-        kind.fromCustomer ? undefined : sellerOf(kind),
-        today,
-        onOrder({ hardwareId: kind.id }),
-      ),
+      buying: buyingFrom(sourceOf(boughtHardware(kind)), onOrder({ hardwareId: kind.id }), kind),
     })),
   };
 }
@@ -80,14 +71,13 @@ interface OfLeather {
   lots: LeatherStock['lots'];
   owed: { day: string; quantity: number }[];
   onOrder: OnOrder;
-  seller: Supplier | undefined;
-  today: string;
+  source: ItemSource;
 }
 
 /** What other jobs still need comes from the rack first, and beyond that from what is on order. */
 function toLeatherStock(
   leather: Leather,
-  { lots, owed, onOrder, seller, today }: OfLeather,
+  { lots, owed, onOrder, source }: OfLeather,
 ): LeatherStock {
   const usable = usableOf(lots);
   const usableShare = leather.wholeUsablePercent.dividedBy(100);
@@ -113,6 +103,6 @@ function toLeatherStock(
         ? null
         : { form: leather.wholeForm, areaMm2: leather.wholeAreaMm2.toString() },
     usablePercent: leather.wholeUsablePercent.toString(),
-    buying: buyingFrom(seller, today, { ...onOrder, drafted: cuttable(onOrder.drafted) }),
+    buying: buyingFrom(source, { ...onOrder, drafted: cuttable(onOrder.drafted) }),
   };
 }

@@ -1,7 +1,6 @@
 import type { Sourcing, Dated } from '@hidewright/domain';
-import { addDays, addWorkdays, isWorkday } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
-import type { Supplier } from '../../modules/suppliers/supplier.entity.ts';
+import type { ItemSource } from '../order-suggestions/item-sources.ts';
 
 export interface Wanted {
   leatherIds: readonly number[];
@@ -67,22 +66,14 @@ function toOnOrder(rows: readonly LineRow[], today: string): OnOrder {
   };
 }
 
-/** Who sells it, and when it is here if it is ordered today: after their days, on a working day. */
+/** Who sells it as what to order has it, and what is drafted there; nobody sells what the customer brings. */
 export function buyingFrom(
-  supplier: Supplier | undefined,
-  today: string,
+  { supplier, terms, arrivesOn }: ItemSource,
   { drafted, drafts, overdue }: OnOrder,
+  { fromCustomer }: { fromCustomer: boolean } = { fromCustomer: false },
 ): Sourcing {
-  return {
-    supplier: supplier?.name ?? null,
-    arrivesOn: supplier === undefined ? null : arrival(today, supplier.leadDays),
-    drafted,
-    drafts,
-    overdue,
-  };
-}
-
-function arrival(today: string, leadDays: number): string {
-  const day = addDays(today, leadDays);
-  return isWorkday(day) ? day : addWorkdays(day, 1);
+  const seller = fromCustomer
+    ? { supplierId: null, supplier: null, arrivesOn: null }
+    : { supplierId: supplier?.id ?? null, supplier: supplier?.name ?? null, arrivesOn };
+  return { ...seller, terms, drafted, drafts, overdue };
 }

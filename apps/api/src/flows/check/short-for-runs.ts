@@ -14,13 +14,12 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { Work } from '../../work.ts';
 import type { CheckedRun, CheckedRuns } from './checked-runs.ts';
+import { lackingOf } from './lacking.ts';
 import { readOwedToJobs } from './owed-to-jobs.ts';
 
 /** Everything that is short for one of the runs, with how it goes on in the coming weeks. */
-export async function shortOf(
-  work: Work,
-  { shop, runs }: CheckedRuns,
-): Promise<RunsCheck['short']> {
+export async function shortOf(work: Work, checked: CheckedRuns): Promise<RunsCheck['short']> {
+  const { shop, runs } = checked;
   const leathers = shop.leathers.flatMap((leather) => {
     const asked = runs.flatMap((run) =>
       run.facts.leather.leather.leatherId === leather.leatherId
@@ -43,6 +42,9 @@ export async function shortOf(
     leatherIds: leathers.map(({ leather }) => leather.leatherId),
     hardwareIds: items.map(({ item }) => item.hardwareId),
   });
+  const lacking = lackingOf(checked);
+  const toOrder = (of: 'leather' | 'hardware', id: number) =>
+    lacking.find((each) => each.of === of && each.id === id)?.toBuy?.quantity ?? '0';
   return [
     ...leathers.map(({ leather, asked }) =>
       leatherShort(leather, {
@@ -50,6 +52,7 @@ export async function shortOf(
         owed: owed.leather(leather.leatherId),
         today: shop.today,
         counted: onHand(`leather ${leather.leatherId}`),
+        toOrder: toOrder('leather', leather.leatherId),
       }),
     ),
     ...items.map(({ item, asked }) =>
@@ -58,6 +61,7 @@ export async function shortOf(
         owed: item.pool.promised,
         today: shop.today,
         counted: onHand(`hardware ${item.hardwareId}`),
+        toOrder: toOrder('hardware', item.hardwareId),
       }),
     ),
   ];
@@ -81,6 +85,7 @@ interface Around {
   owed: readonly Dated[];
   today: string;
   counted: Counted;
+  toOrder: string;
 }
 
 function leatherShort(leather: LeatherStock, around: Around): ShortForRuns {
@@ -123,6 +128,7 @@ function describe(
     needed: sum('needed'),
     buy: sum('buy'),
     drafted: sum('drafted'),
+    toOrder: fromCustomer ? '0' : around.toOrder,
     drafts: [...buying.drafts],
     supplierName: buying.supplier,
     fromCustomer,

@@ -4,6 +4,12 @@ import type { Supplier } from '../../modules/suppliers/supplier.entity.ts';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { ItemRow } from './ordered-items.ts';
 
+/** What the terms of a thing follow from, where nobody made an offer. */
+export type BoughtRow = Pick<
+  ItemRow,
+  'of' | 'id' | 'price' | 'pack_size' | 'supplier_id' | 'whole_area'
+>;
+
 /** Who a thing is ordered from, and as they sell it. */
 export interface ItemTerms {
   supplier: Supplier | null;
@@ -16,7 +22,7 @@ export interface ItemTerms {
  * price and pack, and whole sides where that is how a leather is bought.
  */
 export function itemTerms(
-  row: ItemRow,
+  row: BoughtRow,
   offers: readonly SupplierOfferReply[],
   suppliers: ReadonlyMap<number, Supplier>,
 ): ItemTerms {
@@ -28,18 +34,21 @@ export function itemTerms(
   return { supplier, leadDays, terms: offer === undefined ? ownTerms(row) : offered(row, offer) };
 }
 
-function ownTerms(row: ItemRow): OfferTerms {
+function ownTerms(row: BoughtRow): OfferTerms {
   const price = unscaled(row.price, 4).toFixed();
   return { minimum: null, multiple: packOf(row), breaks: [{ from: '0', price }] };
 }
 
-function offered(row: ItemRow, { minimum, multiple, breaks = [] }: SupplierOfferReply): OfferTerms {
+function offered(
+  row: BoughtRow,
+  { minimum, multiple, breaks = [] }: SupplierOfferReply,
+): OfferTerms {
   const pack = multiple ?? (row.of === 'leather' ? packOf(row) : '1');
   return { minimum: minimum === null ? null : inPacks(minimum, pack), multiple: pack, breaks };
 }
 
 /** Leather that is not bought whole comes in any area, to a mm². */
-function packOf(row: ItemRow): string {
+function packOf(row: BoughtRow): string {
   if (row.of === 'hardware') return String(row.pack_size);
   return row.whole_area === null ? '1' : unscaled(row.whole_area, 3).toFixed();
 }

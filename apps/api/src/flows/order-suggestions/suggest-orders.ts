@@ -2,22 +2,17 @@ import {
   comingStock,
   dailyUse,
   itemUse,
-  leadTime,
   MM2_PER_FT2,
   orderSuggestion,
   type ComingStock,
   type Dated,
   type ItemUse,
-  type LeadTime,
   type OrderSuggestion,
 } from '@hidewright/domain';
-import { Supplier } from '../../modules/suppliers/supplier.entity.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { Work } from '../../work.ts';
 import { readOwedToJobs, type OwedToJobs } from '../check/owed-to-jobs.ts';
-import { readDaysTaken } from './days-taken.ts';
-import { itemTerms, type ItemTerms } from './item-terms.ts';
-import { readOffersByItem } from './offers-by-item.ts';
+import { readItemSources, type ItemSource } from './item-sources.ts';
 import { readOpenLines, type OpenLines } from './open-lines.ts';
 import { readOrderedItems, type ItemRow } from './ordered-items.ts';
 import { readUsedByWeek } from './used-by-week.ts';
@@ -36,9 +31,8 @@ interface Amounts {
 /** A thing with all that is known of it and what follows. */
 export interface Suggested {
   row: ItemRow;
-  sold: ItemTerms;
+  sold: ItemSource;
   use: ItemUse;
-  lead: LeadTime;
   amounts: Amounts;
   open: OpenLines;
   suggestion: OrderSuggestion;
@@ -54,10 +48,8 @@ export interface Suggestions {
 interface Known {
   workshop: Workshop;
   today: string;
-  suppliers: ReadonlyMap<number, Supplier>;
-  offers: Awaited<ReturnType<typeof readOffersByItem>>;
+  sourceOf: Awaited<ReturnType<typeof readItemSources>>;
   used: Awaited<ReturnType<typeof readUsedByWeek>>;
-  daysTaken: Awaited<ReturnType<typeof readDaysTaken>>;
   openLines: Awaited<ReturnType<typeof readOpenLines>>;
   owed: OwedToJobs;
 }
@@ -65,14 +57,11 @@ interface Known {
 /** What should be ordered of everything that is bought, in as many questions to the database whatever there is. */
 export async function suggestOrders({ em, today }: Work): Promise<Suggestions> {
   const rows = await readOrderedItems(em);
-  const suppliers = await em.find(Supplier, {});
   const known: Known = {
     workshop: await em.findOneOrFail(Workshop, 1),
     today,
-    suppliers: new Map(suppliers.map((each) => [each.id, each])),
-    offers: await readOffersByItem(em),
+    sourceOf: await readItemSources(em, today),
     used: await readUsedByWeek(em, today),
-    daysTaken: await readDaysTaken(em, today),
     openLines: await readOpenLines(em, today),
     owed: await readOwedToJobs(em),
   };
@@ -85,23 +74,21 @@ const counted = ({ of }: ItemRow, kept: number): number => (of === 'leather' ? k
 
 function suggestFor(row: ItemRow, known: Known): Suggested {
   const key = `${row.of} ${row.id}`;
-  const sold = itemTerms(row, known.offers(key), known.suppliers);
+  const sold = known.sourceOf(row);
   const use = itemUse(known.used(key).map((kept) => counted(row, kept)));
-  const took = sold.supplier === null ? [] : known.daysTaken(sold.supplier.id);
-  const lead = leadTime(sold.leadDays, took);
   const open = known.openLines(key);
   const owed = row.of === 'leather' ? known.owed.leather(row.id) : known.owed.hardware(row.id);
   const [promised, receipts] = [inUnits(row, owed), inUnits(row, open.receipts)];
   const amounts = amountsOf(row, open, promised);
   const suggestion = orderSuggestion({
     ...amounts,
-    ...{ use, lead, terms: sold.terms, ...ratesOf(known.workshop) },
+    ...{ use, lead: sold.lead, terms: sold.terms, ...ratesOf(known.workshop) },
     pricedAmount: row.of === 'leather' ? MM2_PER_FT2 : '1',
     byHand: byHandOf(row),
   });
   const { today } = known;
   const coming = comingStock({ ...amounts, promised, receipts, today, daily: dailyUse(use) });
-  return { row, sold, use, lead, amounts, open, suggestion, coming };
+  return { row, sold, use, amounts, open, suggestion, coming };
 }
 
 const inUnits = (row: ItemRow, all: readonly Dated[]): Dated[] =>

@@ -1,5 +1,5 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
-import { addDays, addWorkdays, countWords, isWorkday } from '@hidewright/domain';
+import { addDays, countWords } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
 import { sayArea } from '../../modules/stock/say-area.ts';
@@ -24,7 +24,7 @@ export function suggestionReply(item: Suggested, around: Around): OrderSuggestio
     why: whyWords(item, sayerOf(item, around), dueOn),
     ...amountsOf(item),
     ...orderOf(item),
-    ...supplierOf(item, today),
+    ...supplierOf(item),
     dueOn: suggestion.state === 'now' ? today : dueOn,
     runsOutOn: coming.runsOutOn,
     belowMinimumOn: coming.belowMinimumOn,
@@ -81,18 +81,16 @@ function orderOf({ row, sold, suggestion }: Suggested) {
   };
 }
 
-/** On a working day, as a delivery comes. */
-function supplierOf({ sold, lead }: Suggested, today: string) {
-  const { supplier } = sold;
-  const day = addDays(today, Math.round(lead.meanDays));
+function supplierOf({ sold: { supplier, arrivesOn } }: Suggested) {
   return {
     supplierId: supplier?.id ?? null,
     supplierName: supplier?.name ?? null,
-    arrivesOn: supplier === null ? null : isWorkday(day) ? day : addWorkdays(day, 1),
+    arrivesOn,
   };
 }
 
-function statisticsOf({ use, lead, suggestion, row }: Suggested) {
+function statisticsOf({ use, sold, suggestion, row }: Suggested) {
+  const { lead } = sold;
   const { workedOut } = suggestion;
   const kept = row.of === 'leather' ? 1000 : 1;
   return {

@@ -42,11 +42,11 @@ function haveWords({ amounts, suggestion }: Suggested, say: Say): string {
 const freeWords = (free: number, say: Say): string =>
   free === 0 ? 'None free' : `${say(free)} free`;
 
-function pointWords({ suggestion, lead, ...item }: Suggested, say: Say): string {
+function pointWords({ suggestion, sold, ...item }: Suggested, say: Say): string {
   const { point, pointBy } = suggestion;
   if (pointBy === 'hand') return `the ${say(point)} set by hand`;
   if (pointBy === 'minimum') return point === 0 ? 'nothing' : `the minimum of ${say(point)}`;
-  const days = Math.round(lead.meanDays);
+  const days = Math.round(sold.lead.meanDays);
   return `the ${say(point)} that last until a delivery: it takes about ${days} ${days === 1 ? 'day' : 'days'}, at ${rateWords(item, say)}`;
 }
 

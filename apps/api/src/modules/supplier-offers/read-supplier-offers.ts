@@ -10,6 +10,8 @@ interface Asked {
   leatherId?: number | undefined;
   hardwareId?: number | undefined;
   supplierId?: number | undefined;
+  /** Any of these. */
+  of?: { leatherIds: readonly number[]; hardwareIds: readonly number[] } | undefined;
   limit?: number;
 }
 
@@ -35,6 +37,9 @@ const offered = `
   FROM supplier_offer o JOIN supplier s ON s.id = o.supplier_id
   LEFT JOIN leather l ON l.id = o.leather_id LEFT JOIN hardware h ON h.id = o.hardware_id`;
 
+const ofAny = `o.leather_id IN (SELECT value FROM json_each(?, '$.leatherIds'))
+  OR o.hardware_id IN (SELECT value FROM json_each(?, '$.hardwareIds'))`;
+
 /** Offers for one thing or of one supplier, the preferred one of each thing first. */
 export async function readSupplierOffers(
   em: EntityManager,
@@ -45,6 +50,7 @@ export async function readSupplierOffers(
     ...when(asked.leatherId, 'o.leather_id = ?'),
     ...when(asked.hardwareId, 'o.hardware_id = ?'),
     ...when(asked.supplierId, 'o.supplier_id = ?'),
+    ...when(asked.of && JSON.stringify(asked.of), ofAny, (json) => [json, json]),
   ]);
   const sql = `${offered} ${where} ORDER BY o.preferred DESC, o.id LIMIT ?`;
   const rows = await em.execute<Row[]>(sql, [...values, asked.limit ?? 1]);

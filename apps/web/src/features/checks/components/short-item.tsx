@@ -46,13 +46,23 @@ function buying(
   { say, today }: { say: (value: string) => string; today: string },
 ) {
   return [
-    { word: 'to buy', figure: say(item.buy), note: draftedWords(item) },
+    {
+      word: 'to buy',
+      figure: Number(item.toOrder) > 0 ? say(item.toOrder) : 'none',
+      note: draftedWords(item) ?? soldWords(item, say),
+    },
     {
       word: 'ordered today, here by',
       figure: item.arrivesOn === null ? 'not known' : dayText(item.arrivesOn, today),
       note: item.supplierName ?? 'nobody is named who sells it',
     },
   ];
+}
+
+/** Where more has to be bought than is short. */
+function soldWords({ of, buy, toOrder }: ShortForRuns, say: (value: string) => string) {
+  if (say(buy) === say(toOrder)) return undefined;
+  return of === 'leather' ? 'waste and all, as it is sold' : `${say(buy)} short, as it is sold`;
 }
 
 function draftedWords({ drafted, drafts }: ShortForRuns): string | undefined {

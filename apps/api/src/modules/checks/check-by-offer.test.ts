@@ -1,0 +1,111 @@
+import { afterEach, beforeEach, expect, it } from 'vitest';
+import type { OrderSuggestionReply, PurchaseOrder, RunsCheck } from '@hidewright/contract';
+import { readyForTheBench, type BenchShop } from '../../testing/bench-shop.ts';
+import { startTestShop } from '../../testing/test-shop.ts';
+
+let ready: BenchShop;
+let oldbeck: number;
+let fittings: number;
+
+beforeEach(async () => {
+  ready = await readyForTheBench(await startTestShop());
+  oldbeck = await supplier('Oldbeck Tannery', 9);
+  fittings = await supplier('Fennbridge Fittings', 3);
+});
+afterEach(() => ready.shop.close());
+
+const owner = () => ready.shop.as('owner');
+/** 400 rivets, of which 300 are free. */
+const runs = () => [{ patternId: ready.patternId, quantity: 200, by: '2026-12-21' }];
+
+async function supplier(name: string, leadDays: number): Promise<number> {
+  return (await owner().post('/api/suppliers').send({ name, leadDays }).expect(201)).body.id;
+}
+
+const offer = (body: object) => owner().post('/api/supplier-offers').send(body).expect(201);
+
+async function check(): Promise<RunsCheck> {
+  return (await ready.shop.as('maker').post('/api/checks').send({ runs: runs() }).expect(200)).body;
+}
+
+async function draft() {
+  const asked = { runs: runs() };
+  const { body } = await owner().post('/api/checks/purchase-orders').send(asked).expect(201);
+  return body as { orders: PurchaseOrder[]; notes: string[] };
+}
+
+const rivetsOf = ({ runs: [run] }: RunsCheck) =>
+  run?.answers.find(({ about }) => about === 'hardware')?.sentence;
+
+it('goes by the offer that is preferred: its supplier, minimum, packs, days and price', async () => {
+  const { hardwareId } = ready;
+  const breaks = [{ from: '250', price: '0.20' }];
+  await offer({ hardwareId, supplierId: oldbeck, breaks: [{ from: '0', price: '0.10' }] });
+  await offer({
+    ...{ hardwareId, supplierId: fittings, breaks, preferred: true },
+    ...{ minimum: '500', multiple: '250', leadDays: 6 },
+  });
+  const found = await check();
+  expect(rivetsOf(found)).toBe(
+    'Rivet 9 mm: 400 needed, 300 free, 100 short. Buy 2 packs of 250, or receive them if they are here. Ordered from Fennbridge Fittings today, it is here by Mon 7 Dec 2026.',
+  );
+  expect(found.short.find(({ of }) => of === 'hardware')).toMatchObject({
+    ...{ supplierName: 'Fennbridge Fittings', arrivesOn: '2026-12-07' },
+    ...{ buy: '100', toOrder: '500' },
+  });
+  const { orders, notes } = await draft();
+  expect(orders).toMatchObject([
+    {
+      ...{ supplierName: 'Fennbridge Fittings', expectedOn: '2026-12-07' },
+      lines: [{ quantity: 500, unitPrice: '0.20' }],
+    },
+  ]);
+  expect(notes.join()).not.toContain('Rivet');
+  expect((await draft()).orders).toEqual([]);
+});
+
+it('goes on to a price break that costs less, says so, and shows the maker no price', async () => {
+  const breaks = [
+    { from: '0', price: '0.20' },
+    { from: '150', price: '0.12' },
+  ];
+  await offer({ hardwareId: ready.hardwareId, supplierId: fittings, breaks });
+  expect(rivetsOf(await check())).toContain('Buy 150 (the price breaks there), or receive');
+  const { orders, notes } = await draft();
+  expect(orders[0]?.lines).toMatchObject([{ quantity: 150, unitPrice: '0.12' }]);
+  expect(notes).toContain('Rivet 9 mm: 150 cost less than 100, so 150 are drafted.');
+});
+
+it('names what could be had for the same money, and does not take it by itself', async () => {
+  const breaks = [
+    { from: '0', price: '0.20' },
+    { from: '200', price: '0.10' },
+  ];
+  await offer({ hardwareId: ready.hardwareId, supplierId: fittings, breaks });
+  const { orders, notes } = await draft();
+  expect(orders[0]?.lines).toMatchObject([{ quantity: 100 }]);
+  expect(notes).toContain('Rivet 9 mm: 200 cost no more than the 100 that are drafted.');
+});
+
+it('takes leather by the offer as well, in ft² at its break', async () => {
+  const { leatherId } = ready;
+  const breaks = [{ from: '0', price: '8.00' }];
+  await offer({ leatherId, supplierId: oldbeck, breaks, multiple: '9290304', leadDays: 14 });
+  const [lacking] = (await draft()).orders;
+  expect(lacking).toMatchObject({ supplierName: 'Oldbeck Tannery', expectedOn: '2026-12-15' });
+  expect(lacking?.lines).toMatchObject([{ areaMm2: '9290304', unitPrice: '8.00' }]);
+  expect((await check()).short).toEqual(
+    expect.arrayContaining([expect.objectContaining({ of: 'leather', arrivesOn: '2026-12-15' })]),
+  );
+});
+
+it('says the same day as what to order', async () => {
+  const breaks = [{ from: '0', price: '0.20' }];
+  await offer({ hardwareId: ready.hardwareId, supplierId: fittings, breaks, leadDays: 4 });
+  const { body } = await owner().get('/api/order-suggestions?show=all').expect(200);
+  const items = body.items as OrderSuggestionReply[];
+  const suggested = items.find(({ of, id }) => of === 'hardware' && id === ready.hardwareId);
+  const short = (await check()).short.find(({ of }) => of === 'hardware');
+  // Four days from Tuesday is a Saturday: it comes on Monday.
+  expect([suggested?.arrivesOn, short?.arrivesOn]).toEqual(['2026-12-07', '2026-12-07']);
+});
