@@ -101,7 +101,7 @@ interface Order {
   lines: { name: string; toCome: { areaMm2: string | null; quantity: number | null } }[];
 }
 
-test('an owner closes one line of an order, and it is short', async () => {
+test('an owner closes one line of an order, it is short, and is awaited after all', async () => {
   const { page, complaints, close } = await open('owner', wide);
   const { items } = await read<{ items: Order[] }>(page, 'purchase-orders?awaited=yes');
   const isOpen = ({ toCome }: Order['lines'][number]) =>
@@ -121,6 +121,11 @@ test('an owner closes one line of an order, and it is short', async () => {
     .filter({ hasText: line.name })
     .getByText(/ short$/)
     .waitFor();
+  await page.getByRole('button', { name: `Await it after all: ${line.name}` }).click();
+  await expectAccessible(page);
+  await page.getByRole('dialog').getByRole('button', { name: 'Await it' }).click();
+  await page.getByText(`${line.name} is awaited again.`).waitFor();
+  await page.getByRole('button', { name: `Nothing more of ${line.name}` }).waitFor();
   expect(complaints).toEqual([]);
   await close();
 });

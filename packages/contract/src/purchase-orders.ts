@@ -227,3 +227,19 @@ export const closePurchaseLine = endpoint({
   body: z.strictObject({ reason: line(200, 'Say why, in a few words.') }),
   reply: purchaseOrder,
 });
+
+export const reopenPurchaseOrder = endpoint({
+  method: 'POST',
+  path: '/purchase-orders/{id}/reopenings',
+  summary: 'Await after all what was closed short: one line, or all that is missing',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    /** Null for every line that is short. */
+    lineId: id.nullable(),
+    /** When it comes; null leaves the day as it was. */
+    expectedOn: day.nullable().default(null),
+  }),
+  reply: purchaseOrder,
+});

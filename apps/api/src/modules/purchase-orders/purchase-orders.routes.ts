@@ -8,6 +8,7 @@ import {
   listPurchaseOrders,
   purchaseOrderPaper,
   readPurchaseOrder,
+  reopenPurchaseOrder,
   sendPurchaseOrder as sendEndpoint,
   type QueryOf,
 } from '@hidewright/contract';
@@ -31,6 +32,7 @@ import {
 } from './draft-purchase-order.ts';
 import { paperOf } from './purchase-order-paper.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
+import { reopenLines } from './reopen-lines.ts';
 import { readOnePurchaseOrder, readPurchaseOrderList } from './read-purchase-orders.ts';
 
 export function purchaseOrderRoutes(context: Context): Router {
@@ -72,6 +74,12 @@ export function purchaseOrderRoutes(context: Context): Router {
   serve(router, context, closePurchaseLine, async (work, { params, body }) => {
     const order = await findPurchaseOrder(work, params.id);
     await closeLine(work, order, { lineId: params.lineId, reason: body.reason });
+    return readOnePurchaseOrder(work.em, order.id);
+  });
+
+  serve(router, context, reopenPurchaseOrder, async (work, { params, body }) => {
+    const order = await findPurchaseOrder(work, params.id);
+    await reopenLines(work, order, body);
     return readOnePurchaseOrder(work.em, order.id);
   });
 

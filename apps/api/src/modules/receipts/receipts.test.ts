@@ -242,6 +242,53 @@ describe('part deliveries', () => {
     expect(log.body.items[0].action).toMatch(/^closed line 2 of purchase order P-/);
   });
 
+  it('await a closed line after all, or all that is missing, and nothing that is here', async () => {
+    const path = `/api/purchase-orders/${order.id}`;
+    const reopen = (body: object, role: 'owner' | 'maker' = 'owner') =>
+      shop.as(role).post(`${path}/reopenings`).send(body);
+    const read = async () => (await shop.as('owner').get(path).expect(200)).body;
+    const [hides, rivetLine] = (await read()).lines as { id: number }[];
+    const awaited = await reopen({ lineId: hides?.id }).expect(409);
+    expect(awaited.body.detail).toMatch(/^The rest of line 1 of P-\d+ is awaited already\.$/);
+    await reopen({ lineId: null }).expect(409);
+    await receive({ hardware: [rivets(1000)], nothingMore: true }).expect(201);
+    expect(await read()).toMatchObject({
+      state: 'received',
+      lines: [{ toCome: { areaMm2: '0' } }, {}],
+    });
+    await reopen({ lineId: hides?.id }, 'maker').expect(403);
+    await reopen({ lineId: 9999 }).expect(404);
+    const here = await reopen({ lineId: rivetLine?.id }).expect(409);
+    expect(here.body.detail).toMatch(/^All of line 2 of P-\d+ is here\.$/);
+    const over = await reopen({ lineId: hides?.id, expectedOn: '2026-11-30' }).expect(422);
+    expect(over.body.errors).toMatchObject([{ field: 'expectedOn' }]);
+    const again = await reopen({ lineId: null, expectedOn: '2026-12-18' }).expect(201);
+    expect(again.body).toMatchObject({ state: 'part received', awaitedOn: '2026-12-18' });
+    expect(again.body.lines[0]).toMatchObject({ short: { areaMm2: '0' } });
+    expect(again.body.lines[0].toCome.areaMm2).toBe(again.body.lines[0].areaMm2);
+    const log = await shop.as('owner').get('/api/activities').expect(200);
+    expect(log.body.items[0].action).toMatch(/^awaits line 1 of purchase order P-\d+ after all$/);
+    await receive({ lots: [side()] }).expect(201);
+    expect(await read()).toMatchObject({ receipts: 2 });
+  });
+
+  it('keep the other lines closed when one of an order that ended short is awaited', async () => {
+    const path = `/api/purchase-orders/${order.id}`;
+    const { lines } = (await shop.as('owner').get(path).expect(200)).body;
+    await receive({ hardware: [rivets(600)], nothingMore: true }).expect(201);
+    const { body } = await shop
+      .as('owner')
+      .post(`${path}/reopenings`)
+      .send({ lineId: lines[1].id })
+      .expect(201);
+    expect(body).toMatchObject({
+      state: 'part received',
+      lines: [{ toCome: { areaMm2: '0' } }, { toCome: { quantity: 400 } }],
+    });
+    const last = await receive({ hardware: [rivets(400)] }).expect(201);
+    expect(last.body.purchaseOrder).toMatchObject({ state: 'received' });
+  });
+
   it('need nothing of a line that is closed', async () => {
     const path = `/api/purchase-orders/${order.id}`;
     const { lines } = (await shop.as('owner').get(path).expect(200)).body;

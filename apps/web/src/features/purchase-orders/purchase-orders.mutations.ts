@@ -7,6 +7,7 @@ import {
   closeClaim,
   closePurchaseLine,
   openClaim,
+  reopenPurchaseOrder,
   returnToSupplier,
   sendPurchaseOrder,
 } from '@hidewright/contract';
@@ -23,6 +24,8 @@ export const useCancelPurchaseOrder = () => useSend(cancelPurchaseOrder);
 export const useChangeAwaitedDay = () => useSend(changeAwaitedDay);
 
 export const useCloseLine = () => useSend(closePurchaseLine);
+
+export const useReopenPurchaseOrder = () => useSend(reopenPurchaseOrder);
 
 export const useChangeReceipt = () => useSend(changeReceipt);
 

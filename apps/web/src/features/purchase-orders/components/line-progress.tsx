@@ -10,15 +10,24 @@ interface LineProgressProps {
   today: string;
   onChangeDay: (() => void) | undefined;
   onCloseLine: (() => void) | undefined;
+  onReopen: (() => void) | undefined;
 }
 
 /** What a line still lacks and by when, or what it ended over or short. */
-export function LineProgress({ line, order, today, onChangeDay, onCloseLine }: LineProgressProps) {
+export function LineProgress(props: LineProgressProps) {
+  const { line, order, today, onChangeDay, onCloseLine, onReopen } = props;
   const workshop = useWorkshop();
   const { toCome, over, short, expectedOn } = line;
   if (!isNothing(over)) return <strong>{`${goodsText(over, workshop)} over`}</strong>;
   if (!isNothing(short))
-    return <strong className="text-brass">{`${goodsText(short, workshop)} short`}</strong>;
+    return (
+      <span className="block md:text-left">
+        <strong className="text-brass">{`${goodsText(short, workshop)} short`}</strong>
+        {onReopen && (
+          <LineButton onClick={onReopen} word="Await it after all" of={`: ${line.name}`} />
+        )}
+      </span>
+    );
   const awaited = order.state === 'sent' || order.state === 'part received';
   if (!awaited) return '–';
   if (isNothing(toCome)) return 'all here';
@@ -32,15 +41,21 @@ export function LineProgress({ line, order, today, onChangeDay, onCloseLine }: L
         </span>
       )}
       {onChangeDay && (
-        <Button tone="quiet" className="-mr-3.5 md:mr-0 md:-ml-3.5" onClick={onChangeDay}>
-          Another day<span className="sr-only">{` for ${line.name}`}</span>
-        </Button>
+        <LineButton onClick={onChangeDay} word="Another day" of={` for ${line.name}`} />
       )}
       {onCloseLine && (
-        <Button tone="quiet" className="-mr-3.5 md:mr-0 md:-ml-3.5" onClick={onCloseLine}>
-          Nothing more<span className="sr-only">{` of ${line.name}`}</span>
-        </Button>
+        <LineButton onClick={onCloseLine} word="Nothing more" of={` of ${line.name}`} />
       )}
     </span>
+  );
+}
+
+/** Its name ends in the line it is for, which the eye sees beside it. */
+function LineButton({ onClick, word, of }: { onClick: () => void; word: string; of: string }) {
+  return (
+    <Button tone="quiet" className="-mr-3.5 block md:mr-0 md:-ml-3.5" onClick={onClick}>
+      {word}
+      <span className="sr-only">{of}</span>
+    </Button>
   );
 }

@@ -4,7 +4,9 @@ import { buttonLook } from '../../../components/button-look.ts';
 import { Button } from '../../../components/button.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { addressOf } from '../../../lib/api.ts';
+import { isNothing } from '../goods-text.ts';
 import { CancelOrderDialog } from './cancel-order-dialog.tsx';
+import { ReopenDialog } from './reopen-dialog.tsx';
 import { SendOrderDialog } from './send-order-dialog.tsx';
 
 interface OrderActionsProps {
@@ -17,10 +19,11 @@ interface OrderActionsProps {
 /** What the order's state allows now. */
 export function OrderActions(props: OrderActionsProps) {
   const { order, isOwner, mayReceive, maySeePrices } = props;
-  const [asking, setAsking] = useState<'send' | 'cancel'>();
+  const [asking, setAsking] = useState<'send' | 'cancel' | 'reopen'>();
   const { id, state } = order;
   const close = () => setAsking(undefined);
   const awaited = state === 'sent' || state === 'part received';
+  const severalShort = order.lines.filter(({ short }) => !isNothing(short)).length > 1;
   return (
     <>
       {isOwner && state === 'draft' && (
@@ -33,6 +36,9 @@ export function OrderActions(props: OrderActionsProps) {
       )}
       {isOwner && (state === 'draft' || state === 'sent') && (
         <Button onClick={() => setAsking('cancel')}>Cancel</Button>
+      )}
+      {isOwner && severalShort && (
+        <Button onClick={() => setAsking('reopen')}>Await the rest after all</Button>
       )}
       {mayReceive && awaited && (
         <LinkButton tone="primary" to={`/stockroom/receive?order=${id}`}>
@@ -49,6 +55,7 @@ export function OrderActions(props: OrderActionsProps) {
         </a>
       )}
       <SendOrderDialog order={order} open={asking === 'send'} onOpenChange={close} />
+      {asking === 'reopen' && <ReopenDialog order={order} onClose={close} />}
       <CancelOrderDialog order={order} open={asking === 'cancel'} onOpenChange={close} />
     </>
   );

@@ -11,6 +11,7 @@ import { goodsText } from '../goods-text.ts';
 import { AwaitedDayDialog } from './awaited-day-dialog.tsx';
 import { CloseLineDialog } from './close-line-dialog.tsx';
 import { LineProgress } from './line-progress.tsx';
+import { ReopenDialog } from './reopen-dialog.tsx';
 
 const placeOf = (line: PurchaseLine) =>
   line.of === 'leather'
@@ -74,6 +75,7 @@ function PriceDifference({ amount }: { amount: string }) {
 interface LineActs {
   move: (line: PurchaseLine) => void;
   close: (line: PurchaseLine) => void;
+  reopen: (line: PurchaseLine) => void;
 }
 
 function columnsFor(
@@ -116,6 +118,7 @@ function columnsFor(
           today={today}
           onChangeDay={acts && (() => acts.move(row))}
           onCloseLine={acts && (() => acts.close(row))}
+          onReopen={acts && (() => acts.reopen(row))}
         />
       ),
     },
@@ -133,8 +136,14 @@ export function PurchaseLinesTable({ order, isOwner }: PurchaseLinesTableProps) 
   const workshop = useWorkshop();
   const [moving, setMoving] = useState<PurchaseLine>();
   const [closing, setClosing] = useState<PurchaseLine>();
+  const [reopening, setReopening] = useState<PurchaseLine>();
   const columns = useMemo(
-    () => columnsFor(workshop, order, isOwner ? { move: setMoving, close: setClosing } : undefined),
+    () =>
+      columnsFor(
+        workshop,
+        order,
+        isOwner ? { move: setMoving, close: setClosing, reopen: setReopening } : undefined,
+      ),
     [workshop, order, isOwner],
   );
   return (
@@ -151,6 +160,9 @@ export function PurchaseLinesTable({ order, isOwner }: PurchaseLinesTableProps) 
       )}
       {closing && (
         <CloseLineDialog order={order} line={closing} onClose={() => setClosing(undefined)} />
+      )}
+      {reopening && (
+        <ReopenDialog order={order} line={reopening} onClose={() => setReopening(undefined)} />
       )}
     </>
   );
