@@ -72,7 +72,18 @@ test('a maker gives away from the shelf on a phone, and a new quote says what is
   await desk.page.getByRole('link', { name: 'Finished pieces' }).first().click();
   await desk.page.getByRole('heading', { level: 1, name: 'Finished pieces' }).waitFor();
   await desk.page.getByRole('cell', { name: 'tray 3' }).waitFor();
+  await desk.page.getByRole('link', { name: 'Put on the shelf' }).click();
+  await desk.page.getByLabel('Pattern').selectOption(String(patternId));
+  await desk.page.getByLabel('How many').fill('6');
+  await desk.page.getByText('What they cost, and whose mark they bear').click();
+  await desk.page.getByLabel('Each cost to make').fill('1.10');
+  await desk.page.getByRole('button', { name: 'Put on the shelf' }).click();
+  await desk.page.getByText('Say where they come from').first().waitFor();
   await expectAccessible(desk.page);
+  await desk.page.getByLabel('Where they come from').fill('found in a box');
+  await desk.page.getByRole('button', { name: 'Put on the shelf' }).click();
+  await desk.page.getByText(/^6 of .* are put on the shelf\.$/).waitFor();
+  await desk.page.getByRole('cell', { name: 'found in a box' }).waitFor();
   expect(desk.complaints).toEqual([]);
   await desk.close();
 });
@@ -121,7 +132,7 @@ test('an owner closes one line of an order, it is short, and is awaited after al
     .filter({ hasText: line.name })
     .getByText(/ short$/)
     .waitFor();
-  await page.getByRole('button', { name: `Await it after all: ${line.name}` }).click();
+  await page.getByRole('button', { name: `Await the rest of ${line.name}` }).click();
   await expectAccessible(page);
   await page.getByRole('dialog').getByRole('button', { name: 'Await it' }).click();
   await page.getByText(`${line.name} is awaited again.`).waitFor();

@@ -2,11 +2,13 @@ import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import {
+  choice,
   count,
   day,
   id,
   idParams,
   line,
+  money,
   optionalLine,
   page,
   pageQuery,
@@ -89,6 +91,29 @@ export const listFinishedMovements = endpoint({
   params: idParams,
   query: pageQuery.omit({ q: true }),
   reply: page(finishedMovement),
+});
+
+export const putOnShelf = endpoint({
+  method: 'POST',
+  path: '/finished-pieces',
+  summary: 'Put pieces on the shelf that no job of the shop put there: found, or there from before',
+  access: hands,
+  creates: true,
+  body: z.strictObject({
+    patternId: choice('Choose a pattern.'),
+    /** Null for the piece as it is. */
+    option: line(60, 'Name the option.').nullable().default(null),
+    sort: z.enum(['good', 'seconds'], 'Choose good ones or seconds.'),
+    /** Whose mark is stamped on them. */
+    customerId: id.nullable().default(null),
+    quantity: positiveCount,
+    /** Only the owner types it; left out, they cost what those of their kind do. */
+    unitCost: money.nullable().default(null),
+    /** Left empty, where those of their kind lie. */
+    place: optionalLine(60).default(''),
+    reason: line(200, 'Say where they come from, such as found in a box.'),
+  }),
+  reply: finishedPiece,
 });
 
 export const takeFinished = endpoint({

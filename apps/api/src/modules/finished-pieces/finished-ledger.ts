@@ -27,12 +27,30 @@ export async function putFinished(
   kind: FinishedKind,
   made: { quantity: number; value: Decimal; jobId: number; reason: string },
 ): Promise<FinishedPiece> {
+  const piece = await pieceOf(work, kind);
+  await move(work, piece, { kind: 'made', ...made });
+  return piece;
+}
+
+/** Lays pieces that no job put there beside those of their kind; a count, as of what is found. */
+export async function putFoundFinished(
+  work: Work,
+  kind: FinishedKind,
+  found: { quantity: number; unitCost: Decimal | null; reason: string },
+): Promise<FinishedPiece> {
+  const { quantity, unitCost, reason } = found;
+  const piece = await pieceOf(work, kind);
+  const value = unitCost?.times(quantity) ?? (await costOfFound(work, piece, quantity));
+  await move(work, piece, { kind: 'count', quantity, value, jobId: null, reason });
+  return piece;
+}
+
+async function pieceOf({ em }: Work, kind: FinishedKind): Promise<FinishedPiece> {
   const nothing = { onHand: 0, value: new Decimal(0), place: '' };
   const piece =
-    (await work.em.findOne(FinishedPiece, { ...kind })) ??
-    work.em.create(FinishedPiece, { ...kind, ...nothing });
-  await work.em.flush();
-  await move(work, piece, { kind: 'made', ...made });
+    (await em.findOne(FinishedPiece, { ...kind })) ??
+    em.create(FinishedPiece, { ...kind, ...nothing });
+  await em.flush();
   return piece;
 }
 
@@ -70,9 +88,9 @@ export async function countFinishedPieces(
 const costOf = ({ onHand, value }: FinishedPiece, quantity: number): Decimal =>
   unscaled(costOfOldest([{ quantity: onHand, value: scaled(value, 2) }], quantity), 2);
 
-/** Pieces that were found cost what those beside them do, or, where none lies there, what the last made did. */
+/** Pieces that were found cost what those beside them do, or, where none lies there, what the last that came did. */
 async function costOfFound({ em }: Work, piece: FinishedPiece, quantity: number): Promise<Decimal> {
-  const last = { finishedPieceId: piece.id, kind: 'made' as const };
+  const last = { finishedPieceId: piece.id, quantity: { $gt: 0 } };
   const like =
     piece.onHand > 0
       ? { quantity: piece.onHand, value: piece.value }

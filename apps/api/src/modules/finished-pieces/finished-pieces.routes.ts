@@ -4,11 +4,13 @@ import {
   countFinished,
   listFinishedMovements,
   listFinishedPieces,
+  putOnShelf,
   readFinishedPiece,
   takeFinished,
   type FinishedPiece as FinishedReply,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { putOnShelfByHand } from '../../flows/put-on-shelf-by-hand.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
@@ -35,6 +37,14 @@ export function finishedPieceRoutes(context: Context): Router {
     const below = readCursor(cursor);
     const rows = await readFinishedMovements(em, { pieceId, below, limit: limit + 1 });
     return toPage(rows, limit, (row) => row.id);
+  });
+
+  serve(router, context, putOnShelf, async (work, { body }) => {
+    const piece = await putOnShelfByHand(work, body);
+    return told(work, piece.id, (of) => `put ${body.quantity} of ${of} on the shelf`, {
+      quantity: body.quantity,
+      reason: body.reason,
+    });
   });
 
   serve(router, context, takeFinished, async (work, { params, body }) => {

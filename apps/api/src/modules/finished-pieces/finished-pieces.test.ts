@@ -91,6 +91,64 @@ describe('a job that makes more than is ordered, or seconds', () => {
   });
 });
 
+describe('pieces that no job put there', () => {
+  const put = (body: object, role: Role = 'owner') =>
+    post(
+      'finished-pieces',
+      { patternId: ready.patternId, sort: 'good', reason: 'found in a box', ...body },
+      role,
+    );
+
+  it('are put on the shelf by hand, with a cost or without, and logged', async () => {
+    const first = await put({ quantity: 24, unitCost: '1.37', place: 'tray 3' }).expect(201);
+    expect(first.body).toMatchObject({
+      ...{ patternName: 'Round coaster', option: null, sort: 'good', customerId: null },
+      ...{ onHand: 24, place: 'tray 3', value: '32.88', valueEach: '1.37' },
+    });
+    const more = await put({ quantity: 1 }, 'maker').expect(201);
+    expect(more.body).toMatchObject({ id: first.body.id, onHand: 25, place: 'tray 3' });
+    expect(more.body).not.toHaveProperty('value');
+    expect((await shelf())[0]).toMatchObject({ value: '34.25' });
+    expect(await movements(first.body.id)).toMatchObject([
+      { kind: 'count', quantity: 1, jobId: null, reason: 'found in a box' },
+      { kind: 'count', quantity: 24, value: '32.88' },
+    ]);
+    const log = (await as('owner').get('/api/activities')).body.items as { action: string }[];
+    expect(log[0]?.action).toBe('put 1 of Round coaster on the shelf');
+  });
+
+  it('lie apart by sort and mark, and go back to what they cost before', async () => {
+    const marked = await put({ quantity: 3, customerId: ready.customer.id }).expect(201);
+    const seconds = await put({ quantity: 2, sort: 'seconds', unitCost: '0.50' }).expect(201);
+    expect(new Set([marked.body.id, seconds.body.id]).size).toBe(2);
+    expect(marked.body).toMatchObject({ customerName: ready.customer.name, value: '0.00' });
+    const { id } = seconds.body as FinishedPiece;
+    await post(`finished-pieces/${id}/counts`, { counted: 0, reason: 'gone' }).expect(201);
+    await put({ quantity: 4, sort: 'seconds' }).expect(201);
+    expect(await kind('seconds')).toMatchObject({ onHand: 4, value: '2.00' });
+  });
+
+  it('are refused where they make no sense, with a sentence beside the field', async () => {
+    const refused = async (body: object, role: Role = 'owner') =>
+      (await put({ quantity: 1, ...body }, role).expect(422)).body.errors as object[];
+    expect(await refused({ patternId: 999 })).toMatchObject([{ field: 'patternId' }]);
+    expect(await refused({ customerId: 999 })).toMatchObject([{ field: 'customerId' }]);
+    expect(await refused({ option: 'In gold' })).toEqual([
+      {
+        field: 'option',
+        message: 'Round coaster has no option "In gold". Choose one that it has.',
+      },
+    ]);
+    expect(await refused({ unitCost: '1.00' }, 'maker')).toEqual([
+      { field: 'unitCost', message: 'Leave the cost to the owner.' },
+    ]);
+    expect(await refused({ quantity: 0 })).toMatchObject([{ field: 'quantity' }]);
+    expect(await refused({ reason: ' ' })).toMatchObject([{ field: 'reason' }]);
+    await put({ quantity: 1 }, 'bookkeeper').expect(403);
+    expect(await shelf()).toEqual([]);
+  });
+});
+
 describe('pieces on the shelf', () => {
   it('leave it sold, given or spoiled, each with a word, and the last takes the last cent', async () => {
     await finish(53, 0);

@@ -98,6 +98,11 @@ export const stockroomRoutes: RouteObject[] = [
         children: [
           { index: true, lazy: () => import('./stockroom/finished-list.tsx') },
           {
+            path: 'new',
+            handle: { crumb: 'Put on the shelf' },
+            lazy: () => import('./stockroom/put-on-shelf.tsx'),
+          },
+          {
             path: ':id',
             handle: { crumb: finishedOf },
             lazy: () => import('./stockroom/finished.tsx'),

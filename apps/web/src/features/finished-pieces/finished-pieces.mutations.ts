@@ -1,6 +1,7 @@
-import { changeFinishedPiece, countFinished, takeFinished } from '@hidewright/contract';
+import { changeFinishedPiece, countFinished, putOnShelf, takeFinished } from '@hidewright/contract';
 import { useSend } from '../../lib/use-send.ts';
 
+export const usePutOnShelf = () => useSend(putOnShelf);
 export const useTakeFinished = () => useSend(takeFinished);
 export const useCountFinished = () => useSend(countFinished);
 export const useChangeFinished = () => useSend(changeFinishedPiece);

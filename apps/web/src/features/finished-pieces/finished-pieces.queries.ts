@@ -2,6 +2,7 @@ import {
   listFinishedMovements,
   listFinishedPieces,
   readFinishedPiece,
+  readPattern,
   type QueryInputOf,
 } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
@@ -27,6 +28,16 @@ export function finishedPieceQuery(id: number) {
   return queryOptions({
     queryKey: ['finished-piece', id],
     queryFn: ({ signal }) => call(readFinishedPiece, { params: { id }, signal }),
+  });
+}
+
+/** The names of the options that a pattern has; 0 where none is chosen. */
+export function patternOptionsQuery(id: number) {
+  return queryOptions({
+    queryKey: ['patterns', id],
+    queryFn: ({ signal }) => call(readPattern, { params: { id }, signal }),
+    enabled: id > 0,
+    select: ({ definition }) => (definition.options ?? []).map(({ name }) => name),
   });
 }
 

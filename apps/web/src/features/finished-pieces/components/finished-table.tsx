@@ -69,6 +69,7 @@ export function FinishedTable() {
       empty={
         <EmptyState title="No finished pieces are on the shelf.">
           A job that makes more than is ordered puts them here when it is finished, and its seconds.
+          What was there before can be put on the shelf by hand.
         </EmptyState>
       }
       after={

@@ -24,7 +24,7 @@ export function LineProgress(props: LineProgressProps) {
       <span className="block md:text-left">
         <strong className="text-brass">{`${goodsText(short, workshop)} short`}</strong>
         {onReopen && (
-          <LineButton onClick={onReopen} word="Await it after all" of={`: ${line.name}`} />
+          <LineButton onClick={onReopen} word="Await the rest" of={` of ${line.name}`} />
         )}
       </span>
     );

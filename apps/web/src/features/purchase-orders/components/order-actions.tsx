@@ -38,7 +38,7 @@ export function OrderActions(props: OrderActionsProps) {
         <Button onClick={() => setAsking('cancel')}>Cancel</Button>
       )}
       {isOwner && severalShort && (
-        <Button onClick={() => setAsking('reopen')}>Await the rest after all</Button>
+        <Button onClick={() => setAsking('reopen')}>Await all that is missing</Button>
       )}
       {mayReceive && awaited && (
         <LinkButton tone="primary" to={`/stockroom/receive?order=${id}`}>
