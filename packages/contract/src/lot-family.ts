@@ -94,6 +94,8 @@ const lastTime = z
     orderNumber: paperNumber,
     title: z.string(),
     shippedOn: day.nullable(),
+    /** False where nothing of it is taken yet, and the lots are those that are held for it. */
+    cut: z.boolean(),
     lots: z.array(
       z.object({
         lotId: id,

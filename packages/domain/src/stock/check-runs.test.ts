@@ -184,7 +184,7 @@ describe('Can we make it?', () => {
     };
     expect(like(null, 80)).toMatch(/Shades would mix: red-brown and lighter/);
     expect(like('lighter', 24)).toBe('');
-    expect(like('dark', 24)).toBe('The earlier run was cut from dark, this would be red-brown.');
+    expect(like('dark', 24)).toBe('The earlier run’s leather is dark, this would be red-brown.');
   });
 
   it('gives the second run what the first leaves, by their days and then as they were chosen', () => {

@@ -120,7 +120,7 @@ function shadeWords({ shades, likeShade, takes }: LeatherFacts): string[] {
   }
   const [shade] = noted;
   return likeShade && shade !== likeShade && takes.length > 0
-    ? [`The earlier run was cut from ${likeShade}${shade ? `, this would be ${shade}` : ''}.`]
+    ? [`The earlier run’s leather is ${likeShade}${shade ? `, this would be ${shade}` : ''}.`]
     : [];
 }
 

@@ -4,6 +4,7 @@ import { layRulesOf, type LotDrawing, type PatternDefinition } from '@hidewright
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
 import { piecesBySideInput } from '../../modules/layouts/stored-layouts.ts';
+import { readLastTime } from '../../modules/lots/last-time.ts';
 import { usesLeft } from '../../modules/tools/tool-ledger.ts';
 import type { Tool } from '../../modules/tools/tool.entity.ts';
 import { toolsFor } from '../choose-tools.ts';
@@ -19,9 +20,10 @@ export interface NeededTools {
 /** What a planned run asks of the shop. */
 export async function needsOf(
   em: EntityManager,
-  { plan, customerId, by, definition, sides }: PlannedRun,
+  run: PlannedRun,
   { rows, tools }: { rows: readonly LotRow[]; tools: NeededTools },
 ): Promise<RunNeeds> {
+  const { plan, by, definition, sides } = run;
   const { pieces, containerAreaMm2 } = plan.input.layout;
   return {
     by,
@@ -34,7 +36,7 @@ export async function needsOf(
         definition,
         rows.filter((row) => row.leather_id === plan.leatherId),
       ),
-      likeShade: customerId === null ? null : await earlierShade(em, customerId, plan.patternId),
+      likeShade: await earlierShade(em, run),
     },
     hardware: plan.hardware,
     tools: tools.needs,
@@ -127,19 +129,13 @@ function waysOn(
   return takesWhole(side) ? [[...whole, ...strips]] : [strips, whole];
 }
 
-/** The shade of the leather that this customer's last run of the pattern was cut from, where it was noted. */
+/** The shade of the leather that this customer's last run of the pattern is cut from, where it was noted. */
 async function earlierShade(
   em: EntityManager,
-  customerId: number,
-  patternId: number,
+  { customerId, quoteId, plan }: PlannedRun,
 ): Promise<string | null> {
-  const [row] = await em.execute<{ shade: string }[]>(
-    `SELECT l.shade FROM customer_order o JOIN job j ON j.order_id = o.id
-      JOIN pattern_version v ON v.id = j.pattern_version_id
-      JOIN reservation r ON r.job_id = j.id JOIN lot l ON l.id = r.lot_id
-    WHERE o.customer_id = ? AND v.pattern_id = ? AND o.state <> 'cancelled' AND l.shade <> ''
-    ORDER BY r.id DESC LIMIT 1`,
-    [customerId, patternId],
-  );
-  return row?.shade ?? null;
+  if (customerId === null) return null;
+  const pattern = { id: plan.patternId };
+  const last = await readLastTime(em, { customerId, pattern, before: { quoteId } });
+  return last?.lots.find(({ shade }) => shade !== '')?.shade ?? null;
 }

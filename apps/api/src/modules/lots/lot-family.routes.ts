@@ -25,14 +25,18 @@ export function lotFamilyRoutes(context: Context): Router {
   });
 
   serve(router, context, readLastTimeOfOrder, async ({ em }, { params }) => {
-    const { id: beforeOrderId, customerId } = await findOrder(em, params.id);
-    const { patternVersionId } = await em.findOneOrFail(Job, { orderId: beforeOrderId });
-    return { lastTime: await readLastTime(em, { customerId, patternVersionId, beforeOrderId }) };
+    const { id: orderId, customerId } = await findOrder(em, params.id);
+    const { patternVersionId } = await em.findOneOrFail(Job, { orderId });
+    const pattern = { versionId: patternVersionId };
+    return { lastTime: await readLastTime(em, { customerId, pattern, before: { orderId } }) };
   });
 
   serve(router, context, readLastTimeOfQuote, async ({ em }, { params }) => {
     const { customerId, patternVersionId } = await findQuote({ em }, params.id);
-    return { lastTime: await readLastTime(em, { customerId, patternVersionId }) };
+    const pattern = { versionId: patternVersionId };
+    return {
+      lastTime: await readLastTime(em, { customerId, pattern, before: { quoteId: params.id } }),
+    };
   });
 
   return router;

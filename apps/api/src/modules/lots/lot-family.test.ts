@@ -101,6 +101,7 @@ describe('the chain from the side to the customer', () => {
     expect((await get(`quotes/${again.quoteId}/last-time`)).lastTime.orderNumber).toBe(
       order.number,
     );
+    expect(lastTime.cut).toBe(true);
     expect((await get('orders/1/last-time')).lastTime).toBeNull();
     await ready.shop.as('bookkeeper').get('/api/orders/1/last-time').expect(403);
   });

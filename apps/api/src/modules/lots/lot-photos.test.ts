@@ -1,6 +1,6 @@
-import { deflateSync } from 'node:zlib';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { photoSentences } from '@hidewright/contract';
+import { png } from '../../testing/grey-picture.ts';
 import { ft2, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { noteFile } from '../files/stored-files.ts';
@@ -21,28 +21,6 @@ beforeAll(async () => {
   [lotId, otherId] = (body.lots as { id: number }[]).map(({ id }) => id) as [number, number];
 });
 afterAll(() => shop.close());
-
-/** A grey picture; its checksums are left out, which no reader of its size looks at. */
-function png(width: number, height: number): Buffer {
-  const head = Buffer.alloc(13);
-  head.writeUInt32BE(width, 0);
-  head.writeUInt32BE(height, 4);
-  head[8] = 8;
-  const rows = deflateSync(Buffer.alloc((width + 1) * Math.min(height, 20_000), 0x80));
-  const parts: [string, Buffer][] = [
-    ['IHDR', head],
-    ['IDAT', rows],
-    ['IEND', Buffer.alloc(0)],
-  ];
-  const begins = Buffer.from('\x89PNG\r\n\x1a\n', 'latin1');
-  return Buffer.concat([begins, ...parts.map(([name, data]) => chunk(name, data))]);
-}
-
-function chunk(name: string, data: Buffer): Buffer {
-  const length = Buffer.alloc(4);
-  length.writeUInt32BE(data.length);
-  return Buffer.concat([length, Buffer.from(name, 'latin1'), data, Buffer.alloc(4)]);
-}
 
 const send = (bytes: Buffer, type = 'image/png', lot = lotId) =>
   shop.as('maker').post(`/api/lots/${lot}/photos`).set('Content-Type', type).send(bytes);

@@ -13,18 +13,19 @@ export function LastTimeCard({ of, id }: { of: 'order' | 'quote'; id: number }) 
   const { today } = useWorkshop();
   const { data } = useQuery(lastTimeQuery({ of, id }));
   if (!data?.lastTime || data.lastTime.lots.length === 0) return null;
-  const { orderId, orderNumber, title, shippedOn, lots } = data.lastTime;
+  const { orderId, orderNumber, title, shippedOn, cut, lots } = data.lastTime;
   return (
     <Card
       title="The shade to match"
       subtitle={
         <>
-          Last time: <TextLink to={`/counter/orders/${orderId}`}>{orderNumber}</TextLink> {title}
+          {cut ? 'Last time' : 'Held for'}:{' '}
+          <TextLink to={`/counter/orders/${orderId}`}>{orderNumber}</TextLink> {title}
           {shippedOn !== null && `, shipped ${dayText(shippedOn, today)}`}
         </>
       }
     >
-      <ul aria-label="Cut from last time" className="space-y-3">
+      <ul aria-label={cut ? 'Cut from last time' : 'Held, and not cut yet'} className="space-y-3">
         {lots.map((lot) => (
           <Swatch key={lot.lotId} lot={lot} />
         ))}
