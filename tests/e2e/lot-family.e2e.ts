@@ -21,12 +21,41 @@ interface TicketLot {
   takenAreaMm2: string;
   mix: { of: string } | null;
 }
+interface LastTime {
+  lastTime: { lots: { lotId: number; tag: string }[] };
+}
+interface Drawing {
+  version: number;
+  outline: unknown;
+  flaws: unknown;
+  usablePercent: string;
+}
 interface Found {
   items: { id: number; state: string }[];
 }
 
 async function read<T>(page: Page, address: string): Promise<T> {
   return (await (await page.request.get(`${hidewright.url}/api${address}`)).json()) as T;
+}
+
+/** Photographs the lot that the run before was cut from; any picture will do. */
+async function photographLastTime(page: Page, orderId: number): Promise<string> {
+  const { lastTime } = await read<LastTime>(page, `/orders/${orderId}/last-time`);
+  const { lotId, tag } = lastTime.lots[0] as { lotId: number; tag: string };
+  const lot = `${hidewright.url}/api/lots/${lotId}`;
+  const headers = { 'Content-Type': 'image/png' };
+  const data = await page.screenshot();
+  const { hash } = await (await page.request.post(`${lot}/photos`, { headers, data })).json();
+  const { version, outline, flaws, usablePercent } = await read<Drawing>(
+    page,
+    `/lots/${lotId}/drawing`,
+  );
+  const kept = await page.request.put(`${lot}/drawing`, {
+    headers: { 'If-Match': `"${version}"` },
+    data: { outline, flaws, usablePercent, photo: { hash, mmPerPixel: 2, x: 0, y: 0 } },
+  });
+  expect(kept.status()).toBe(200);
+  return tag;
 }
 
 test('a maker is warned of shades, puts an offcut back, and reads the chain', async () => {
@@ -36,11 +65,20 @@ test('a maker is warned of shades, puts an offcut back, and reads the chain', as
   await signInAs(page, hidewright.url, 'maker');
   const jobs = (await read<Found>(page, '/jobs?open=true&limit=200')).items;
   const jobId = jobs.find(({ state }) => state === 'at the bench')?.id;
-  const { lots } = await read<{ lots: TicketLot[] }>(page, `/jobs/${jobId}`);
+  const { lots, orderId } = await read<{ lots: TicketLot[]; orderId: number }>(
+    page,
+    `/jobs/${jobId}`,
+  );
   const taken = lots.find(({ takenAreaMm2 }) => takenAreaMm2 !== '0');
   const lighter = lots.find(({ mix }) => mix?.of === 'shades');
+  const earlier = await photographLastTime(page, orderId);
   await visit(page, `${hidewright.url}/bench/jobs/${jobId}`);
   await page.getByRole('heading', { name: 'The shade to match' }).waitFor();
+  const swatch = page.getByRole('img', { name: `Lot ${earlier}` });
+  await swatch.waitFor();
+  await settled(page);
+  const seen = await swatch.evaluate((image) => (image as HTMLImageElement).naturalWidth);
+  expect(seen).toBe(phone.width);
 
   await page.getByRole('button', { name: 'Take another amount of leather' }).click();
   const taking = page.getByRole('dialog', { name: 'Take leather' });
