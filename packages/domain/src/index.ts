@@ -134,6 +134,7 @@ export * from './hardware/count-by-weight.ts';
 export * from './hardware/post-fit.ts';
 
 export * from './buying/share-carriage.ts';
+export * from './buying/share-service.ts';
 export * from './buying/compare-area.ts';
 export * from './buying/line-progress.ts';
 

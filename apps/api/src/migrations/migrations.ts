@@ -12,6 +12,7 @@ import { TheOffers } from './migration-20261203-the-offers.ts';
 import { TheFamily } from './migration-20261204-the-family.ts';
 import { TheOrdersDue } from './migration-20261204-the-orders-due.ts';
 import { TheShelf } from './migration-20261204-the-shelf.ts';
+import { TheServices } from './migration-20261205-the-services.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -29,4 +30,5 @@ export const migrations = [
   { name: 'migration-20261204-the-family', class: TheFamily },
   { name: 'migration-20261204-the-orders-due', class: TheOrdersDue },
   { name: 'migration-20261204-the-shelf', class: TheShelf },
+  { name: 'migration-20261205-the-services', class: TheServices },
 ];

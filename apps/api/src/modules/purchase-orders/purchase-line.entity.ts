@@ -1,8 +1,8 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 import type { Decimal } from 'decimal.js';
-import { UnitPriceType } from '../../db/columns/columns.ts';
+import { MoneyType, UnitPriceType } from '../../db/columns/columns.ts';
 
-/** What is ordered on one line: leather by area, or hardware by the piece. */
+/** What is ordered on one line: leather by area, hardware by the piece, or work on a lot that goes out for it. */
 @Entity({ tableName: 'purchase_line' })
 export class PurchaseLine {
   [OptionalProps]?: 'received' | 'closed';
@@ -16,6 +16,7 @@ export class PurchaseLine {
   @Property({ type: 'integer', columnType: 'integer' })
   position!: number;
 
+  /** Of a service, the leather that the lot becomes. */
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   leatherId: number | null = null;
 
@@ -40,4 +41,16 @@ export class PurchaseLine {
   /** Per ft², or per piece. */
   @Property({ type: UnitPriceType })
   unitPrice!: Decimal;
+
+  /** Work bought in, as people name it: dyeing; null where goods are ordered. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  service: string | null = null;
+
+  /** The lot that goes out for it. */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  fromLotId: number | null = null;
+
+  /** What a service costs for the lot, where it is not paid per ft². */
+  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  fixedPrice: Decimal | null = null;
 }

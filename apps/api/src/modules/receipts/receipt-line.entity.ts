@@ -1,10 +1,12 @@
-import { Entity, PrimaryKey, Property } from '@mikro-orm/core';
-import type { Decimal } from 'decimal.js';
+import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
+import { Decimal } from 'decimal.js';
 import { AreaType, MoneyType } from '../../db/columns/columns.ts';
 
 /** One lot, or so many of one hardware, that came with a delivery. */
 @Entity({ tableName: 'receipt_line' })
 export class ReceiptLine {
+  [OptionalProps]?: 'material';
+
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
 
@@ -43,6 +45,10 @@ export class ReceiptLine {
   /** Its share of freight and duty. */
   @Property({ type: MoneyType })
   carriage!: Decimal;
+
+  /** Of leather that was out for a service: its share of what that had cost when it went. */
+  @Property({ type: MoneyType, columnType: 'integer' })
+  material: Decimal = new Decimal(0);
 
   /** The row of the ledger that put it on the rack. */
   @Property({ type: 'integer', columnType: 'integer' })

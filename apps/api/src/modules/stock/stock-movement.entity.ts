@@ -44,6 +44,10 @@ export class StockMovement {
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   purchaseOrderId: number | null = null;
 
+  /** Of leather that went out for a service, or is back on its lot without it: the line that sent it. */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  purchaseLineId: number | null = null;
+
   @Property({ type: 'text', columnType: 'text' })
   reason = '';
 
