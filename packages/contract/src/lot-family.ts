@@ -8,12 +8,16 @@ const member = z.object({
   lotId: id,
   tag: z.string(),
   form: z.enum(lotForms),
-  /** The lot that it was cut from; null for the one that came in. */
+  /** The lot that it was cut from, or was before a service; null for the one that came in. */
   parentId: id.nullable(),
+  /** The work after which it came back as a lot of its own, such as dyeing. */
+  service: z.string().nullable(),
   shade: z.string(),
   place: z.string(),
   measuredAreaMm2: z.string(),
   onHandAreaMm2: z.string(),
+  /** Out with a supplier to be worked on. */
+  outAreaMm2: z.string(),
 });
 export type FamilyMember = z.infer<typeof member>;
 

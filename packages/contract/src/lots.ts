@@ -11,6 +11,7 @@ import {
   optionalLine,
   page,
   pageQuery,
+  paperNumber,
   percent,
   version,
 } from './fields.ts';
@@ -33,6 +34,18 @@ export const lotForms = [
 export type LotForm = (typeof lotForms)[number];
 
 const tag = line(30, 'Enter the tag, such as T-0012.');
+
+/** Leather of a lot that is out with a supplier to be worked on. */
+const outFor = z.object({
+  service: z.string(),
+  areaMm2: z.string(),
+  supplierName: z.string(),
+  purchaseOrderId: id,
+  purchaseOrderNumber: paperNumber,
+  becomesName: z.string(),
+  expectedOn: z.string().nullable(),
+});
+export type OutFor = z.infer<typeof outFor>;
 
 export const lot = z
   .object({
@@ -57,6 +70,7 @@ export const lot = z
     onHandAreaMm2: z.string(),
     reservedAreaMm2: z.string(),
     freeAreaMm2: z.string(),
+    outFor: z.array(outFor),
     /** What is left of it, at cost. */
     valueOnHand: confidential(z.string()),
     version,

@@ -8,6 +8,7 @@ import {
   id,
   idParams,
   line,
+  money,
   page,
   pageQuery,
   paperNumber,
@@ -16,6 +17,7 @@ import {
   unitPrice,
   version,
 } from './fields.ts';
+import { lotForms } from './lots.ts';
 
 export const purchaseOrderStates = [
   'draft',
@@ -32,6 +34,31 @@ const orderedArea = areaMm2.refine(
   'Enter an area above zero, and at most 100,000 ft².',
 );
 
+/** Work bought in that makes another leather of a lot: splitting, skiving, dyeing. */
+const typedService = z
+  .strictObject({
+    of: z.literal('service'),
+    /** The work, in one word or a few. */
+    service: line(40, 'Say which work, such as dyeing.'),
+    lotId: choice('Choose the lot that goes out.'),
+    /** How much of the lot; left out, all that is free of it. */
+    areaMm2: orderedArea.nullish(),
+    becomesLeatherId: choice('Choose the leather that it becomes.'),
+    /** Per ft² of what goes out … */
+    unitPrice: unitPrice.nullish(),
+    /** … or for the lot. */
+    fixedPrice: money.nullish(),
+  })
+  .refine((typed) => (typed.unitPrice ?? null) !== null || (typed.fixedPrice ?? null) !== null, {
+    path: ['unitPrice'],
+    message: 'Enter the price per ft², or for the lot.',
+  })
+  .refine((typed) => (typed.unitPrice ?? null) === null || (typed.fixedPrice ?? null) === null, {
+    path: ['fixedPrice'],
+    message: 'Enter one price: per ft², or for the lot.',
+  });
+export type ServiceLineTyped = z.output<typeof typedService>;
+
 const typedLine = z.discriminatedUnion(
   'of',
   [
@@ -47,10 +74,13 @@ const typedLine = z.discriminatedUnion(
       quantity: positiveCount,
       unitPrice,
     }),
+    typedService,
   ],
-  'Choose a leather, or hardware.',
+  'Choose a leather, hardware, or a service.',
 );
 export type PurchaseLineTyped = z.output<typeof typedLine>;
+/** What is bought, not worked on. */
+export type GoodsLineTyped = Exclude<PurchaseLineTyped, { of: 'service' }>;
 
 const typed = {
   supplierId: choice('Choose a supplier.'),
@@ -65,14 +95,32 @@ const typed = {
 /** Of leather an area, of hardware a count. */
 const goods = z.object({ areaMm2: z.string().nullable(), quantity: z.int().nullable() });
 
+/** What a line has done to a lot. */
+const service = z
+  .object({
+    word: z.string(),
+    lotId: id,
+    lotTag: z.string(),
+    lotForm: z.enum(lotForms),
+    becomesLeatherId: id,
+    becomesName: z.string(),
+    /** Whether the leather becomes another one. */
+    changes: z.boolean(),
+    state: z.enum(['to go out', 'out', 'came back', 'put back']),
+  })
+  .meta({ id: 'PurchasedService' });
+export type PurchasedService = z.infer<typeof service>;
+
 export const purchaseLine = z
   .object({
     id,
     position: z.int(),
-    of: z.enum(['leather', 'hardware']),
+    of: z.enum(['leather', 'hardware', 'service']),
     leatherId: id.nullable(),
     hardwareId: id.nullable(),
+    /** Of a service, the work and the lot: Dyeing of T-0012, Oak tan natural. */
     name: z.string(),
+    service: service.nullable(),
     /** Of leather: what was ordered and what came. */
     areaMm2: z.string().nullable(),
     receivedAreaMm2: z.string().nullable(),
@@ -87,6 +135,8 @@ export const purchaseLine = z
     expectedOn: z.string().nullable(),
     /** Per ft², or per piece. */
     unitPrice: confidential(z.string()),
+    /** Of a service that is paid for the lot: then its price per ft² is 0. */
+    fixedPrice: confidential(z.string().nullable()),
     amount: confidential(z.string()),
     /** What was paid for what came, and how much that is above its price on the order. */
     paid: confidential(z.string()),

@@ -47,6 +47,8 @@ export const receiptLine = z
     /** What the goods cost, and their share of freight and duty. */
     goods: confidential(z.string()),
     carriage: confidential(z.string()),
+    /** Of leather that was out for a service: what that had cost before. */
+    material: confidential(z.string()),
   })
   .meta({ id: 'ReceiptLine' });
 export type ReceiptLine = z.infer<typeof receiptLine>;

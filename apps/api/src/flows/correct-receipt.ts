@@ -68,7 +68,7 @@ const itemOf = ({ lotId, hardwareId }: ReceiptLine) =>
   lotId === null ? { hardwareId: hardwareId ?? 0 } : { lotId };
 
 async function takeOut(work: Work, { purchaseOrderId }: Receipt, line: ReceiptLine) {
-  const value = line.goods.plus(line.carriage);
+  const value = line.goods.plus(line.carriage).plus(line.material);
   const reason = 'to be written again at another cost';
   const { quantity } = line;
   await undoReceipt(work, { ...itemOf(line), quantity, value, purchaseOrderId, reason });
@@ -91,7 +91,7 @@ function shareOut(receipt: Receipt, lines: ReceiptLine[]): void {
 }
 
 async function putBack(work: Work, { purchaseOrderId }: Receipt, line: ReceiptLine) {
-  const value = line.goods.plus(line.carriage);
+  const value = line.goods.plus(line.carriage).plus(line.material);
   const reason = [batchWords(line.batch), 'cost put right'].filter(Boolean).join(', ');
   const { quantity } = line;
   if (line.lotId !== null) (await findLot(work.em, line.lotId)).cost = value;

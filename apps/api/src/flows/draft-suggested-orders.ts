@@ -1,4 +1,4 @@
-import type { BodyOf, draftSuggested, PurchaseLineTyped } from '@hidewright/contract';
+import type { BodyOf, draftSuggested, GoodsLineTyped } from '@hidewright/contract';
 import { Exact } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
@@ -97,16 +97,23 @@ async function putOnDraft(
   return made.id;
 }
 
-const newestDraft = ({ em }: Work, supplierId: number): Promise<PurchaseOrder | null> =>
-  em.findOne(PurchaseOrder, { supplierId, state: 'draft' }, { orderBy: { id: 'desc' } });
+/** A draft that sends leather out to be worked on is left alone: it waits for its lot. */
+async function newestDraft({ em }: Work, supplierId: number): Promise<PurchaseOrder | null> {
+  const newest = { orderBy: { id: 'desc' } } as const;
+  const drafts = await em.find(PurchaseOrder, { supplierId, state: 'draft' }, newest);
+  const ids = drafts.map(({ id }) => id);
+  const works = await em.find(PurchaseLine, { purchaseOrderId: ids, service: { $ne: null } });
+  const busy = new Set(works.map(({ purchaseOrderId }) => purchaseOrderId));
+  return drafts.find(({ id }) => !busy.has(id)) ?? null;
+}
 
-async function linesOf({ em }: Work, draft: PurchaseOrder): Promise<PurchaseLineTyped[]> {
+async function linesOf({ em }: Work, draft: PurchaseOrder): Promise<GoodsLineTyped[]> {
   const lines = await em.find(
     PurchaseLine,
     { purchaseOrderId: draft.id },
     { orderBy: { position: 'asc' } },
   );
-  return lines.map(({ leatherId, hardwareId, quantity, unitPrice }) =>
+  return lines.map(({ leatherId, hardwareId, quantity, unitPrice }): GoodsLineTyped =>
     leatherId === null
       ? { of: 'hardware', hardwareId: hardwareId ?? 0, quantity, unitPrice: priceText(unitPrice) }
       : {
@@ -119,10 +126,7 @@ async function linesOf({ em }: Work, draft: PurchaseOrder): Promise<PurchaseLine
 }
 
 /** More of what is on the draft already goes to its line, at the price of both together. */
-function withWanted(
-  lines: readonly PurchaseLineTyped[],
-  { item, asked }: Wanted,
-): PurchaseLineTyped[] {
+function withWanted(lines: readonly GoodsLineTyped[], { item, asked }: Wanted): GoodsLineTyped[] {
   const at = lines.findIndex((line) =>
     line.of === 'leather'
       ? asked.of === 'leather' && line.leatherId === asked.id

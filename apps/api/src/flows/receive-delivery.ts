@@ -11,8 +11,10 @@ import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
 import { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
-import { priceHardware, priceLot, withCarriage } from './receive/price-delivery.ts';
+import { priceHardware, priceLot, withCarriage, type PricedLine } from './receive/price-delivery.ts';
+import { withServices } from './receive/price-services.ts';
 import { putOnRack } from './receive/put-on-rack.ts';
+import { putLotsBack } from './services/put-lots-back.ts';
 
 type Delivery = BodyOf<typeof endpoint>;
 
@@ -23,7 +25,8 @@ interface Received {
 
 /**
  * Takes in what a supplier brought: lots with their tags and measured areas, hardware by count, each at what it cost
- * with its share of freight and duty. For an order, its lines fill up and its state follows.
+ * with its share of freight and duty. For an order, its lines fill up and its state follows; leather that was out for a
+ * service is a new lot under the one that went.
  * @throws {Problem} 409 when the order awaits nothing or somebody was quicker, 422 where what was typed cannot be
  */
 export async function receiveDelivery(work: Work, asked: Delivery): Promise<Received> {
@@ -33,18 +36,20 @@ export async function receiveDelivery(work: Work, asked: Delivery): Promise<Rece
   const came = asked.lots.length + asked.hardware.length > 0;
   const receiptId = came ? await takeIn(work, delivery, asked) : null;
   await delivery.finish({ came, nothingMore });
+  if (delivery.order !== null && nothingMore) await putLotsBack(work, delivery.order);
   return { receiptId, purchaseOrderId };
 }
 
 async function takeIn(work: Work, delivery: OpenDelivery, asked: Delivery): Promise<number> {
   const receivedOn = asked.receivedOn ?? work.today;
   const receipt = await writeReceipt(work, asked, receivedOn);
-  const priced = [];
+  const priced: PricedLine[] = [];
   for (const [at, typed] of asked.lots.entries())
     priced.push(await priceLot(work, delivery, typed, `lots.${at}`));
   for (const [at, typed] of asked.hardware.entries())
     priced.push(await priceHardware(work, delivery, typed, `hardware.${at}`));
-  for (const [at, line] of withCarriage(priced, asked).entries()) {
+  const told = await withServices(work, priced);
+  for (const [at, line] of withCarriage(told, asked).entries()) {
     const rack = { receivedOn, purchaseOrderId: asked.purchaseOrderId };
     const { lotId, hardwareId, movementId } = await putOnRack(work, line, rack);
     work.em.create(ReceiptLine, {
@@ -58,6 +63,7 @@ async function takeIn(work: Work, delivery: OpenDelivery, asked: Delivery): Prom
       batch: line.batch,
       goods: line.goods,
       carriage: line.carriage,
+      material: line.material,
       movementId,
     });
   }

@@ -11,11 +11,12 @@ import { Supplier } from '../modules/suppliers/supplier.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
 import type { PurchaseOrderOnPaper } from './put-purchase-order-on-paper.ts';
+import { sendLotsOut } from './services/send-lots-out.ts';
 
 /**
  * Sends a draft to its supplier, by e-mail with its paper or in the owner's own way; from now on it is awaited, and
- * the file that was sent stays.
- * @throws {Problem} 409 when it is no draft, 422 when it cannot go by e-mail
+ * the file that was sent stays. The lots that it has worked on go out with it.
+ * @throws {Problem} 409 when it is no draft, or less of such a lot is free, 422 when it cannot go by e-mail
  */
 export async function sendPurchaseOrder(
   work: Work,
@@ -33,6 +34,7 @@ export async function sendPurchaseOrder(
   order.sentAt = work.now.toISOString();
   order.expectedOn ??= addDays(work.today, supplier.leadDays);
   await work.em.flush();
+  await sendLotsOut(work, order);
   if (asked.by === 'mail') await mail(work, order, { supplier, file: drawn.file });
   await logDeed(work, {
     action: `sent purchase order ${order.number} to ${supplier.name} ${asked.by === 'mail' ? 'by e-mail' : 'by hand'}`,

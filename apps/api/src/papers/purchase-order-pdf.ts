@@ -28,10 +28,12 @@ export interface PurchaseOrderPaper {
     /** With its unit: "40 ft²", "1,000". */
     quantity: string;
     unitPrice: string;
-    /** "ft²" or "each" */
+    /** "per ft²", "each" or "for the lot" */
     per: string;
     amount: string;
   }[];
+  /** No goods are asked for. */
+  onlyWork: boolean;
   total: string;
   note: string;
 }
@@ -54,7 +56,9 @@ export function drawPurchaseOrder(order: PurchaseOrderPaper): Promise<Uint8Array
     number: `Order ${order.number}`,
     shop: order.shopName,
     name: order.supplierName,
-    about: 'Please send us what stands below.',
+    about: order.onlyWork
+      ? 'Please do the work that stands below.'
+      : 'Please send us what stands below.',
   });
   const below = Math.max(drawFacts(paper, order), drawCode(paper, order));
   drawWords(

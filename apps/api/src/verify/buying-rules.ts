@@ -23,12 +23,33 @@ export const buyingRules: Rule[] = [
     GROUP BY r.id HAVING COALESCE(SUM(l.carriage), 0) <> r.freight + r.duty`,
   ),
   none(
-    'What came stands in the ledger with its quantity, at what goods and carriage cost',
+    'What came stands in the ledger with its quantity, at what goods and carriage cost and what leather had cost before a service',
     `SELECT 'line ' || l.position || ' of the delivery of ' || r.received_on || ' differs from the ledger' AS fault
     FROM receipt_line l JOIN receipt r ON r.id = l.receipt_id JOIN stock_movement m ON m.id = l.movement_id
-    WHERE m.kind <> 'receive' OR m.quantity <> l.quantity OR m.value <> l.goods + l.carriage
+    WHERE m.kind <> 'receive' OR m.quantity <> l.quantity OR m.value <> l.goods + l.carriage + l.material
       OR m.lot_id IS NOT l.lot_id OR m.hardware_id IS NOT l.hardware_id
       OR m.purchase_order_id IS NOT r.purchase_order_id`,
+  ),
+  none(
+    'Leather is out on a sent line for a service until it is back, all of it and at what it went for',
+    `SELECT p.number || ' line ' || n.position || ' has ' || COALESCE(-SUM(m.quantity), 0) || ' out at ' || COALESCE(-SUM(m.value), 0)
+      || ', and should have ' || CASE WHEN n.received > 0 OR (n.closed = 0 AND p.state IN ('sent', 'part received'))
+        THEN n.quantity ELSE 0 END AS fault
+    FROM purchase_line n JOIN purchase_order p ON p.id = n.purchase_order_id
+    LEFT JOIN stock_movement m ON m.purchase_line_id = n.id
+    WHERE n.service IS NOT NULL GROUP BY n.id
+    HAVING COALESCE(-SUM(m.quantity), 0) <> CASE WHEN n.received > 0 OR (n.closed = 0 AND p.state IN ('sent', 'part received'))
+        THEN n.quantity ELSE 0 END
+      OR (COALESCE(SUM(m.quantity), 0) = 0 AND COALESCE(SUM(m.value), 0) <> 0)
+      OR SUM(m.lot_id IS NOT n.from_lot_id OR m.purchase_order_id IS NOT n.purchase_order_id) > 0`,
+  ),
+  none(
+    'What came back from a service bears what the leather had cost that went out, to the cent',
+    `SELECT p.number || ' line ' || n.position || ' went out at ' || cost || ', and came back with ' || material AS fault FROM (
+      SELECT n.*, (SELECT COALESCE(-SUM(m.value), 0) FROM stock_movement m WHERE m.purchase_line_id = n.id) AS cost,
+        (SELECT COALESCE(SUM(l.material), 0) FROM receipt_line l WHERE l.purchase_line_id = n.id) AS material
+      FROM purchase_line n) n JOIN purchase_order p ON p.id = n.purchase_order_id
+    WHERE material <> CASE WHEN n.service IS NOT NULL AND n.received > 0 THEN cost ELSE 0 END`,
   ),
   none(
     'A claim is of lots that came with its delivery and are short of their mark',

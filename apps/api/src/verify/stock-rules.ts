@@ -36,10 +36,17 @@ export const stockRules: Rule[] = [
     WHERE m.quantity IS NOT l.measured_area_mm2 OR m.value IS NOT l.cost`,
   ),
   none(
-    'An offcut came once, from the lot that it hangs on, and no other lot did',
+    'An offcut came once, from the lot that it hangs on',
     `SELECT l.tag || ' hangs on lot ' || COALESCE(l.parent_id, 0) || ', its first row on ' || COALESCE(MIN(m.from_lot_id), 0) AS fault
-    FROM lot l LEFT JOIN stock_movement m ON m.lot_id = l.id AND m.from_lot_id IS NOT NULL
+    FROM lot l JOIN stock_movement m ON m.lot_id = l.id AND m.from_lot_id IS NOT NULL
     GROUP BY l.id HAVING MIN(m.from_lot_id) IS NOT l.parent_id OR COUNT(m.id) > 1`,
+  ),
+  none(
+    'What came back from a service hangs on the lot that went out, and no other lot but an offcut hangs on one',
+    `SELECT l.tag || ' hangs on lot ' || COALESCE(l.parent_id, 0) || ', out went lot ' || COALESCE(n.from_lot_id, 0) AS fault
+    FROM lot l LEFT JOIN purchase_line n ON n.id = l.purchase_line_id
+    WHERE NOT EXISTS (SELECT 1 FROM stock_movement m WHERE m.lot_id = l.id AND m.from_lot_id IS NOT NULL)
+      AND l.parent_id IS NOT n.from_lot_id`,
   ),
   none(
     'No job brought back more of a lot than it took, whole or as offcuts',

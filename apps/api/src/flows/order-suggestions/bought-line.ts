@@ -1,4 +1,4 @@
-import type { PurchaseLineTyped } from '@hidewright/contract';
+import type { GoodsLineTyped } from '@hidewright/contract';
 import { Exact, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
@@ -13,7 +13,7 @@ export function boughtLine(
   { of, id }: Thing,
   { breaks }: OfferTerms,
   quantity: string,
-): PurchaseLineTyped {
+): GoodsLineTyped {
   const reached = breaks.findLast(({ from }) => new Exact(from).lte(quantity)) ?? breaks[0];
   const unitPrice = priceText(new Decimal(reached?.price ?? '0'));
   return of === 'leather'

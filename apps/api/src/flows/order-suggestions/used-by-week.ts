@@ -11,13 +11,13 @@ interface Row {
 
 const weeksOfAYear = 52;
 
-/** What jobs took, less what they gave back; counts and adjustments are no use. */
+/** What jobs took, less what they gave back; counts and adjustments are no use, nor is what is out to be worked on. */
 const sql = `
   WITH moved AS MATERIALIZED (
     SELECT CASE WHEN m.hardware_id IS NULL THEN 'leather ' || lot.leather_id
         ELSE 'hardware ' || m.hardware_id END AS key, m.day,
       CAST(julianday(?) - julianday(m.day) AS INTEGER) / 7 AS week,
-      CASE WHEN m.kind IN ('take', 'return') THEN -m.quantity ELSE 0 END AS used
+      CASE WHEN m.kind IN ('take', 'return') AND m.purchase_line_id IS NULL THEN -m.quantity ELSE 0 END AS used
     FROM stock_movement m LEFT JOIN lot ON lot.id = m.lot_id WHERE m.day <= ?),
   by_week AS (
     SELECT key, week, MIN(day) AS first, SUM(used) AS used FROM moved GROUP BY key, week)

@@ -7,8 +7,12 @@ import { invalid } from '../../http/problem.ts';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { Leather } from '../../modules/leathers/leather.entity.ts';
 import { hardwareCost, leatherCost } from '../../modules/purchase-orders/line-amount.ts';
+import type { PurchaseLine } from '../../modules/purchase-orders/purchase-line.entity.ts';
 import type { OpenDelivery } from '../../modules/purchase-orders/open-delivery.ts';
 import type { Work } from '../../work.ts';
+
+/** Nothing, but of what was out for a service. */
+const material = new Decimal(0);
 
 interface Priced {
   field: string;
@@ -19,11 +23,19 @@ interface Priced {
   batch: string;
   /** What the goods cost. */
   goods: Decimal;
+  /** Of leather that was out for a service: what it had cost before. */
+  material: Decimal;
 }
 
+export type LotLine = Priced & {
+  of: 'lot';
+  typed: ReceivedLot;
+  leather: Leather;
+  /** The line that it was out on. */
+  service: PurchaseLine | null;
+};
 /** A line of a delivery: what came, at what it costs. */
-type PricedLine = Priced &
-  ({ of: 'lot'; typed: ReceivedLot; leather: Leather } | { of: 'hardware'; hardware: Hardware });
+export type PricedLine = LotLine | (Priced & { of: 'hardware'; hardware: Hardware });
 /** With its share of freight and duty. */
 export type LandedLine = PricedLine & { carriage: Decimal };
 
@@ -46,8 +58,9 @@ export async function priceLot(
       : new Decimal(typed.cost);
   const markedAreaMm2 = typed.markedAreaMm2 === null ? null : new Decimal(typed.markedAreaMm2);
   const purchaseLineId = line?.id ?? null;
-  const priced = { field, purchaseLineId, quantity, markedAreaMm2, batch: '', goods };
-  return { of: 'lot', typed, leather, ...priced };
+  const service = line?.service ? line : null;
+  const priced = { field, purchaseLineId, quantity, markedAreaMm2, batch: '', goods, material };
+  return { of: 'lot', typed, leather, service, ...priced };
 }
 
 export async function priceHardware(
@@ -69,7 +82,7 @@ export async function priceHardware(
       ? hardwareCost(quantity, line?.unitPrice ?? hardware.unitPrice, `${field}.cost`)
       : new Decimal(typed.cost);
   const purchaseLineId = line?.id ?? null;
-  const priced = { field, purchaseLineId, quantity, markedAreaMm2: null, batch, goods };
+  const priced = { field, purchaseLineId, quantity, markedAreaMm2: null, batch, goods, material };
   return { of: 'hardware', hardware, ...priced };
 }
 

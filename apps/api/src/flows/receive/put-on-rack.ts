@@ -1,8 +1,10 @@
 import { Decimal } from 'decimal.js';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { logDeed } from '../../modules/activity/activity-log.ts';
+import { findLot } from '../../modules/lots/find-lot.ts';
 import { drawTag, requireFreeTag } from '../../modules/lots/lot-tags.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
+import type { PurchaseLine } from '../../modules/purchase-orders/purchase-line.entity.ts';
 import { receiveStock } from '../../modules/stock/stock-ledger.ts';
 import type { Work } from '../../work.ts';
 import type { LandedLine } from './price-delivery.ts';
@@ -26,16 +28,21 @@ export async function putOnRack(work: Work, line: LandedLine, rack: Rack): Promi
   const movement = await receiveStock(work, {
     ...item,
     quantity: line.quantity,
-    value: line.goods.plus(line.carriage),
+    value: costOf(line),
     purchaseOrderId: rack.purchaseOrderId,
-    reason: batchWords(line.batch),
+    reason: line.of === 'lot' && line.service ? backFrom(line.service) : batchWords(line.batch),
   });
   await log(work, line, lot);
   return { lotId: lot?.id ?? null, hardwareId: hardware?.id ?? null, movementId: movement.id };
 }
 
+/** With freight and duty, and with what it had cost before where it was out for a service. */
+const costOf = ({ goods, carriage, material }: LandedLine) => goods.plus(carriage).plus(material);
+
 /** How a batch stands in the ledger, where a failure is traced. */
 export const batchWords = (batch: string) => (batch === '' ? '' : `batch ${batch}`);
+
+const backFrom = ({ service }: PurchaseLine) => `back from ${service ?? ''}`;
 
 /** The lot with its tag, before anything is on hand of it. */
 async function hang(
@@ -43,7 +50,7 @@ async function hang(
   line: LandedLine & { of: 'lot' },
   { receivedOn }: Rack,
 ): Promise<Lot> {
-  const { typed, field, leather, purchaseLineId, goods, carriage } = line;
+  const { typed, field, leather, purchaseLineId } = line;
   if (typed.tag !== '') await requireFreeTag(work.em, typed.tag, `${field}.tag`);
   const { form, pieces, grade, shade, place, supplierLot, widthMm, heightMm } = typed;
   const lot = work.em.create(Lot, {
@@ -52,11 +59,14 @@ async function hang(
     form,
     pieces,
     measuredAreaMm2: new Decimal(typed.measuredAreaMm2),
-    cost: goods.plus(carriage),
+    cost: costOf(line),
     receivedOn,
     purchaseLineId,
+    parentId: line.service?.fromLotId ?? null,
   });
   assignDefined(lot, { grade, shade, place, supplierLot });
+  if (supplierLot === '' && lot.parentId !== null)
+    lot.supplierLot = (await findLot(work.em, lot.parentId)).supplierLot;
   if (widthMm !== null) lot.widthMm = new Decimal(widthMm);
   if (heightMm !== null) lot.heightMm = new Decimal(heightMm);
   await work.em.flush();

@@ -1,6 +1,7 @@
 import type { FamilyMember, LotOrigin } from '@hidewright/contract';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { linesOut } from './read-out.ts';
 
 interface MemberRow {
   id: number;
@@ -11,6 +12,8 @@ interface MemberRow {
   place: string;
   measured_area_mm2: number;
   on_hand: number;
+  out: number;
+  service: string | null;
   photo_hash: string | null;
   received_on: string;
   supplier_lot: string;
@@ -38,7 +41,8 @@ export async function readRelatives(
      family (id) AS (
        SELECT id FROM up WHERE parent_id IS NULL
        UNION SELECT lot.id FROM family JOIN lot ON lot.parent_id = family.id)
-     SELECT lot.*, COALESCE(b.on_hand, 0) AS on_hand, s.name AS supplier_name,
+     SELECT lot.*, COALESCE(b.on_hand, 0) AS on_hand, s.name AS supplier_name, l.service,
+       COALESCE((SELECT SUM(l.quantity) FROM ${linesOut} WHERE l.from_lot_id = lot.id), 0) AS out,
        p.id AS purchase_order_id, p.number AS purchase_order_number
      FROM family JOIN lot ON lot.id = family.id
      LEFT JOIN stock_balance b ON b.lot_id = lot.id
@@ -73,7 +77,9 @@ function relativeOf(row: MemberRow): Relative {
     shade: row.shade,
     place: row.place,
     measuredAreaMm2: unscaled(row.measured_area_mm2, 3).toFixed(),
+    service: row.service,
     onHandAreaMm2: unscaled(row.on_hand, 3).toFixed(),
+    outAreaMm2: unscaled(row.out, 3).toFixed(),
     photoHash: row.photo_hash,
     origin: {
       receivedOn: row.received_on,

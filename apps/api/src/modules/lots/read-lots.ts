@@ -4,6 +4,7 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
+import { readOut } from './read-out.ts';
 
 interface Asked {
   id?: number | undefined;
@@ -63,7 +64,11 @@ export async function readLotList(em: EntityManager, asked: Asked): Promise<LotR
   ]);
   const sql = `SELECT * FROM (${measured}) ${where} ORDER BY id DESC LIMIT ?`;
   const rows = await em.execute<Row[]>(sql, [...values, asked.limit ?? 1]);
-  return rows.map(toReply);
+  const outOf = await readOut(
+    em,
+    rows.map(({ id }) => id),
+  );
+  return rows.map((row) => toReply(row, outOf(row.id)));
 }
 
 /** @throws {Problem} 404 */
@@ -77,7 +82,7 @@ const areaText = (thousandths: number) => unscaled(thousandths, 3).toFixed();
 const lengthText = (nanometres: number | null) =>
   nanometres === null ? null : unscaled(nanometres, 6).toFixed();
 
-function toReply(row: Row): LotReply {
+function toReply(row: Row, outFor: LotReply['outFor']): LotReply {
   return {
     id: row.id,
     tag: row.tag,
@@ -99,6 +104,7 @@ function toReply(row: Row): LotReply {
     onHandAreaMm2: areaText(row.on_hand),
     reservedAreaMm2: areaText(row.reserved),
     freeAreaMm2: areaText(Math.max(0, row.on_hand - row.reserved)),
+    outFor,
     valueOnHand: moneyText(unscaled(row.value, 2)),
     version: row.version,
   };

@@ -3,6 +3,7 @@ import type {
   addPurchaseOrder,
   BodyOf,
   changePurchaseOrder,
+  GoodsLineTyped,
   PurchaseLineTyped,
 } from '@hidewright/contract';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
@@ -16,6 +17,7 @@ import { Supplier } from '../suppliers/supplier.entity.ts';
 import { requireBookable } from './line-amount.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
+import { keepService, type GoesOut } from './service-line.ts';
 
 /** @throws {Problem} 404 */
 export async function findPurchaseOrder(work: Work, id: number): Promise<PurchaseOrder> {
@@ -110,8 +112,10 @@ async function writeLines(
   order: PurchaseOrder,
   lines: PurchaseLineTyped[],
 ): Promise<void> {
-  for (const [at, line] of lines.entries()) await requireThing(work, line, at);
-  const kept = lines.map(toKept);
+  const kept: Kept[] = [];
+  const goesOut: GoesOut = new Map();
+  for (const [at, line] of lines.entries())
+    kept.push(await toKept(work, line, { field: `lines.${at}`, goesOut }));
   requireBookable(kept);
   for (const [at, line] of kept.entries()) {
     work.em.create(PurchaseLine, { ...line, purchaseOrderId: order.id, position: at + 1 });
@@ -119,8 +123,17 @@ async function writeLines(
   await work.em.flush();
 }
 
+type Kept = Pick<PurchaseLine, 'leatherId' | 'hardwareId' | 'quantity' | 'unitPrice'> &
+  Partial<Pick<PurchaseLine, 'service' | 'fromLotId' | 'fixedPrice'>>;
+
 /** A line as its table keeps it: leather in thousandths of mm², hardware in pieces. */
-function toKept(line: PurchaseLineTyped) {
+async function toKept(
+  work: Work,
+  line: PurchaseLineTyped,
+  within: { field: string; goesOut: GoesOut },
+): Promise<Kept> {
+  if (line.of === 'service') return keepService(work, line, within);
+  await requireThing(work, line, within.field);
   const unitPrice = new Decimal(line.unitPrice);
   return line.of === 'leather'
     ? {
@@ -132,14 +145,14 @@ function toKept(line: PurchaseLineTyped) {
     : { leatherId: null, hardwareId: line.hardwareId, quantity: line.quantity, unitPrice };
 }
 
-async function requireThing(work: Work, line: PurchaseLineTyped, at: number): Promise<void> {
+async function requireThing(work: Work, line: GoodsLineTyped, field: string): Promise<void> {
   if (line.of === 'leather') {
     if ((await work.em.findOne(Leather, line.leatherId)) !== null) return;
-    throw invalid([{ field: `lines.${at}.leatherId`, message: 'Choose a leather from the list.' }]);
+    throw invalid([{ field: `${field}.leatherId`, message: 'Choose a leather from the list.' }]);
   }
   if ((await work.em.findOne(Hardware, line.hardwareId)) !== null) return;
   throw invalid([
-    { field: `lines.${at}.hardwareId`, message: 'Choose hardware or supplies from the list.' },
+    { field: `${field}.hardwareId`, message: 'Choose hardware or supplies from the list.' },
   ]);
 }
 

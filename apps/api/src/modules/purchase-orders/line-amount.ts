@@ -26,10 +26,13 @@ interface Line {
   leatherId: number | null;
   quantity: number;
   unitPrice: Decimal;
+  /** Of a service that is paid for the lot. */
+  fixedPrice?: Decimal | null;
 }
 
 /** The amount of an order's line. */
 export function lineAmount(line: Line, field = 'unitPrice'): Decimal {
+  if (line.fixedPrice) return line.fixedPrice;
   return line.leatherId === null
     ? hardwareCost(line.quantity, line.unitPrice, field)
     : leatherCost(unscaled(line.quantity, 3), line.unitPrice, field);

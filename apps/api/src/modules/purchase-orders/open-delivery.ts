@@ -51,6 +51,10 @@ export class OpenDelivery {
     );
   }
 
+  get order(): PurchaseOrder | null {
+    return this.#order;
+  }
+
   get orderId(): number | null {
     return this.#order?.id ?? null;
   }
@@ -66,6 +70,9 @@ export class OpenDelivery {
       'leatherId' in came
         ? came.leatherId === line?.leatherId
         : came.hardwareId === line?.hardwareId;
+    if (line !== undefined && line.service !== null) {
+      return this.#fillService(line, { came, quantity, field });
+    }
     if (line === undefined || !matches) {
       throw invalid([
         {
@@ -80,6 +87,22 @@ export class OpenDelivery {
       );
     }
     line.received += quantity;
+    this.#filled.add(line.id);
+    return line;
+  }
+
+  /** A service is done with the delivery that brings it back, as so many lots, of whichever leather they have become. */
+  #fillService(
+    line: PurchaseLine,
+    { came, quantity, field }: { came: Came; quantity: number; field: string },
+  ): PurchaseLine {
+    if ('hardwareId' in came) {
+      const message = `Line ${line.position} is leather that is out for ${line.service ?? ''}. Receive it as a lot.`;
+      throw invalid([{ field: `${field}.purchaseLineId`, message }]);
+    }
+    if (line.closed && !this.#filled.has(line.id)) throw isOutNoMore(line);
+    line.received += quantity;
+    line.closed = true;
     this.#filled.add(line.id);
     return line;
   }
@@ -109,6 +132,15 @@ function awaitsNothing(order: PurchaseOrder) {
   return wrongState(`${order.number} is ${order.state}. Receive what came without the order.`, [
     'receive without the order',
   ]);
+}
+
+function isOutNoMore({ position, received, service }: PurchaseLine) {
+  const where =
+    received > 0 ? `came back from ${service ?? ''} already` : 'is back on its lot already';
+  return wrongState(
+    `The leather of line ${position} ${where}. Receive what came beyond it without the order.`,
+    ['receive without the order'],
+  );
 }
 
 function nothingCame(order: PurchaseOrder) {

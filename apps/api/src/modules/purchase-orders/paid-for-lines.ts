@@ -18,13 +18,17 @@ export async function readPaid(em: EntityManager, lines: PurchaseLine[]): Promis
 
 /**
  * What was paid for what came on a line, and how much more that is than at the order's price. Leather is priced by
- * the area marked on it, where one is; each delivery rounds to the cent by itself, as it was received.
+ * the area marked on it, where one is; each delivery rounds to the cent by itself, as it was received. A service has its price
+ * however much of it comes back.
  */
 export function paidOf(paid: Paid, line: PurchaseLine): { paid: string; priceDifference: string } {
   const came = paid.get(line.id) ?? [];
   const sum = (amounts: Decimal[]) => Decimal.sum(0, ...amounts);
   const goods = sum(came.map((row) => row.goods));
-  const asOrdered = sum(came.map((row) => atOrderedPrice(row, line)));
+  const asOrdered =
+    line.service === null
+      ? sum(came.map((row) => atOrderedPrice(row, line)))
+      : sum(came.length === 0 ? [] : [lineAmount(line)]);
   return { paid: moneyText(goods), priceDifference: moneyText(goods.minus(asOrdered)) };
 }
 

@@ -1,5 +1,5 @@
 import { Decimal } from 'decimal.js';
-import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
+import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { sayArea } from '../stock/say-area.ts';
 
 interface Sender {
@@ -16,7 +16,7 @@ export function purchaseOrderLetter(
 ): { subject: string; body: string } {
   const paragraphs = [
     'Good day,',
-    `Please send us, on our order ${order.number}:`,
+    asking(order),
     order.lines.map((line) => sayLine(line, from)).join('\n'),
     `Together ${from.currency} ${order.total ?? ''}, before carriage and tax.`,
     order.expectedOn === null
@@ -34,8 +34,35 @@ export function purchaseOrderLetter(
   };
 }
 
+/** Leather that goes out comes with the letter or after it; goods are only asked for. */
+function asking({ number, lines }: PurchaseOrder): string {
+  const works = lines.filter(({ of }) => of === 'service').length;
+  if (works === 0) return `Please send us, on our order ${number}:`;
+  if (works === lines.length) return `Please do this work for us, on our order ${number}:`;
+  return `Please send us, and do for us, on our order ${number}:`;
+}
+
 function sayLine(line: PurchaseLine, { areaUnit, currency }: Sender): string {
   const price = `${currency} ${line.unitPrice ?? ''}`;
+  if (line.service !== null) return sayWork(line, line.service, { areaUnit, currency });
   if (line.areaMm2 === null) return `- ${line.quantity ?? 0} × ${line.name}, at ${price} each`;
   return `- ${sayArea(new Decimal(line.areaMm2), areaUnit)} of ${line.name}, at ${price} per ft²`;
+}
+
+/** - Dyeing of T-0012, Oak tan natural 7–8 oz, 24.8 ft², to become Oak tan black 7–8 oz, at USD 1.50 per ft² */
+function sayWork(
+  line: PurchaseLine,
+  { changes, becomesName }: PurchasedService,
+  { areaUnit, currency }: Pick<Sender, 'areaUnit' | 'currency'>,
+): string {
+  const price = line.fixedPrice ?? null;
+  const parts = [
+    line.name,
+    sayArea(new Decimal(line.areaMm2 ?? 0), areaUnit),
+    ...(changes ? [`to become ${becomesName}`] : []),
+    price === null
+      ? `at ${currency} ${line.unitPrice ?? ''} per ft²`
+      : `at ${currency} ${price} for the lot`,
+  ];
+  return `- ${parts.join(', ')}`;
 }

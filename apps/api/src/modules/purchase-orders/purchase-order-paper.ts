@@ -1,6 +1,6 @@
 import { addDays, minorDigits } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
-import type { PurchaseLine } from '@hidewright/contract';
+import type { PurchasedService, PurchaseLine } from '@hidewright/contract';
 import { dayIn } from '../../day-in.ts';
 import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
 import type { Work } from '../../work.ts';
@@ -25,6 +25,7 @@ export async function paperOf(work: Work, order: PurchaseOrder): Promise<Purchas
     currency: workshop.currency,
     digits: minorDigits(workshop.currency),
     lines: told.lines.map((line) => printedLine(line, workshop.areaUnit)),
+    onlyWork: told.lines.every(({ of }) => of === 'service'),
     total: told.total ?? '0.00',
     note: order.note,
   };
@@ -44,5 +45,19 @@ function printedLine(
     unitPrice,
     per: areaMm2 === null ? 'each' : 'per ft²',
     amount,
+    ...(line.service !== null && workOf(line, line.service)),
+  };
+}
+
+/** Work on a lot of the shop's own: what it becomes stands under its name. */
+function workOf(
+  { name, fixedPrice, unitPrice = '0.00' }: PurchaseLine,
+  { changes, becomesName }: PurchasedService,
+) {
+  const fixed = fixedPrice ?? null;
+  return {
+    name: changes ? `${name}, to become ${becomesName}` : name,
+    unitPrice: fixed ?? unitPrice,
+    per: fixed === null ? 'per ft²' : 'for the lot',
   };
 }

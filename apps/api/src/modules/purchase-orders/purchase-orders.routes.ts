@@ -19,6 +19,7 @@ import {
   type PurchaseOrderOnPaper,
 } from '../../flows/put-purchase-order-on-paper.ts';
 import { sendPurchaseOrder } from '../../flows/send-purchase-order.ts';
+import { putLotsBack } from '../../flows/services/put-lots-back.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve, serveFile } from '../../http/serve.ts';
@@ -74,6 +75,7 @@ export function purchaseOrderRoutes(context: Context): Router {
   serve(router, context, closePurchaseLine, async (work, { params, body }) => {
     const order = await findPurchaseOrder(work, params.id);
     await closeLine(work, order, { lineId: params.lineId, reason: body.reason });
+    await putLotsBack(work, order, params.lineId);
     return readOnePurchaseOrder(work.em, order.id);
   });
 
@@ -105,7 +107,9 @@ export function purchaseOrderRoutes(context: Context): Router {
   });
 
   serve(router, context, cancelEndpoint, async (work, { params, body }) => {
-    await cancelPurchaseOrder(work, await findPurchaseOrder(work, params.id), body.reason);
+    const order = await findPurchaseOrder(work, params.id);
+    await cancelPurchaseOrder(work, order, body.reason);
+    await putLotsBack(work, order);
     return readOnePurchaseOrder(work.em, params.id);
   });
 

@@ -5,11 +5,10 @@ import type { PurchaseLine as LineReply, PurchaseOrder as OrderReply } from '@hi
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { moneyText, priceText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
-import { Hardware } from '../hardware/hardware.entity.ts';
-import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { lineProgress } from '@hidewright/domain';
 import { lineAmount } from './line-amount.ts';
+import { nameOf, readLineNames, serviceOf, type LineNames } from './line-names.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { paidOf, readPaid, type Paid } from './paid-for-lines.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
@@ -26,7 +25,7 @@ export async function readPurchaseOrderList(
     { purchaseOrderId: orders.map((order) => order.id) },
     { orderBy: { position: 'asc' } },
   );
-  const names = await readNames(em, lines);
+  const names = await readLineNames(em, lines);
   const paid = await readPaid(em, lines);
   const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
   return orders.map((order) => {
@@ -42,25 +41,12 @@ export async function readOnePurchaseOrder(em: EntityManager, id: number): Promi
   return found;
 }
 
-interface Names {
-  leathers: Map<number, Leather>;
-  hardware: Map<number, Hardware>;
-}
-
-async function readNames(em: EntityManager, lines: PurchaseLine[]): Promise<Names> {
-  const ids = (of: 'leatherId' | 'hardwareId') => lines.flatMap((line) => line[of] ?? []);
-  return {
-    leathers: await byId(em.find(Leather, { id: ids('leatherId') })),
-    hardware: await byId(em.find(Hardware, { id: ids('hardwareId') })),
-  };
-}
-
 async function byId<T extends { id: number }>(rows: Promise<T[]>): Promise<Map<number, T>> {
   return new Map((await rows).map((row) => [row.id, row]));
 }
 
 interface Known {
-  names: Names;
+  names: LineNames;
   paid: Paid;
 }
 
@@ -98,13 +84,9 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
   return {
     id: line.id,
     position: line.position,
-    of: ofLeather ? 'leather' : 'hardware',
-    leatherId: line.leatherId,
-    hardwareId: line.hardwareId,
-    name:
-      names.leathers.get(line.leatherId ?? 0)?.name ??
-      names.hardware.get(line.hardwareId ?? 0)?.name ??
-      '',
+    ...whatOf(line),
+    name: nameOf(line, names),
+    service: serviceOf(line, order, names),
     areaMm2: area(line.quantity),
     receivedAreaMm2: area(line.received),
     quantity: pieces(line.quantity),
@@ -114,9 +96,17 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
     short: goods(short),
     expectedOn: line.expectedOn ?? order.expectedOn,
     unitPrice: priceText(line.unitPrice),
+    fixedPrice: line.fixedPrice === null ? null : moneyText(line.fixedPrice),
     amount: moneyText(lineAmount(line)),
     ...paidOf(paid, line),
   };
+}
+
+/** A service names no goods: what it becomes stands with it. */
+function whatOf({ service, leatherId, hardwareId }: PurchaseLine) {
+  if (service !== null) return { of: 'service' as const, leatherId: null, hardwareId: null };
+  const of = leatherId === null ? ('hardware' as const) : ('leather' as const);
+  return { of, leatherId, hardwareId };
 }
 
 function awaitedOn(order: PurchaseOrder, lines: PurchaseLine[]): string | null {
@@ -127,8 +117,16 @@ function awaitedOn(order: PurchaseOrder, lines: PurchaseLine[]): string | null {
   return days.sort()[0] ?? null;
 }
 
-/** A draft awaits all of itself; of a cancelled order nothing is missing. */
-function progressOf({ quantity, received, closed }: PurchaseLine, { state }: PurchaseOrder) {
+/**
+ * A draft awaits all of itself; of a cancelled order nothing is missing. What comes back of a service is measured
+ * anew and may be split in two: it is neither over nor short.
+ */
+function progressOf(line: PurchaseLine, { state }: PurchaseOrder) {
+  const { quantity, received, closed, service } = line;
+  if (service !== null) {
+    const open = received === 0 && !closed && state !== 'cancelled' && state !== 'received';
+    return { toCome: open ? quantity : 0, over: 0, short: 0 };
+  }
   const ordered = state === 'cancelled' ? received : quantity;
   return lineProgress({ ordered, received }, state !== 'received' && !closed);
 }

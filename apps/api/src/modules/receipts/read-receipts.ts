@@ -40,6 +40,7 @@ interface LineRow {
   batch: string;
   goods: number;
   carriage: number;
+  material: number;
   claim_id: number | null;
   moved_since: number;
 }
@@ -133,6 +134,7 @@ function toLine(row: LineRow, tolerancePercent: string): LineReply {
     claimId: row.claim_id,
     goods: moneyText(unscaled(row.goods, 2)),
     carriage: moneyText(unscaled(row.carriage, 2)),
+    material: moneyText(unscaled(row.material, 2)),
   };
 }
 

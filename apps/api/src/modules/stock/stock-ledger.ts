@@ -3,6 +3,7 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { describeItem } from './described-item.ts';
+import { holdersOf } from './holders-of.ts';
 import { Reservation } from './reservation.entity.ts';
 import { balanceOf, move } from './stock-rows.ts';
 import { StockBalance } from './stock-balance.entity.ts';
@@ -182,6 +183,36 @@ export async function rejectStock(
   return move(work, asked, { kind: 'reject', quantity: -quantity, value, purchaseOrderId, reason });
 }
 
+interface Out {
+  lotId: number;
+  quantity: number;
+  /** The order that sends it out, and its line. */
+  purchaseOrderId: number;
+  purchaseLineId: number;
+  reason: string;
+}
+
+/**
+ * Takes leather off the rack that goes out to be worked on, at what it stands at.
+ * @throws {Problem} 409 naming what is free, and which jobs hold the rest, when it is less
+ */
+export async function sendOut(work: Work, { lotId, ...out }: Out): Promise<StockMovement> {
+  requireQuantity(out.quantity);
+  const { free } = await freeOf(work.em, { lotId });
+  if (out.quantity > free) throw await notFreeToGo(work, { lotId, ...out }, free);
+  const value = (await costOfGoing(work.em, { lotId }, out.quantity)).negated();
+  return move(work, { lotId }, { kind: 'take', ...out, quantity: -out.quantity, value });
+}
+
+/** Puts back on its lot what was out and comes back as it went, at what it went for. */
+export async function putBackUnworked(
+  work: Work,
+  { lotId, ...back }: Out & { value: Decimal },
+): Promise<StockMovement> {
+  requireQuantity(back.quantity);
+  return move(work, { lotId }, { kind: 'return', ...back });
+}
+
 /**
  * Sets what is on hand to what was counted. A count that agrees moves nothing; one that leaves less than is held for
  * jobs names the reservations that now stand on too little.
@@ -293,6 +324,16 @@ async function tooLittle(work: Work, item: StockItem, asked: number, most: numbe
   return wrongState(
     `There is ${say(most)} of ${name} to be had, and ${say(asked)} was asked for. Ask for less, or receive more first.`,
     most > 0 ? [`up to ${say(most)}`] : [],
+  );
+}
+
+async function notFreeToGo(work: Work, { lotId, quantity }: Out, free: number) {
+  const { name, say } = await describeItem(work.em, { lotId });
+  const holders = await holdersOf(work.em, { lotId });
+  const held = holders.length === 0 ? '' : ` Held: ${holders.join(', ')}.`;
+  return wrongState(
+    `Of ${name} ${say(free)} is free now, and ${say(quantity)} is to go out.${held} Change the line to what is free, or let the job go first.`,
+    free > 0 ? [`send out up to ${say(free)}`] : [],
   );
 }
 

@@ -15,6 +15,7 @@ interface Movement {
   jobId?: number | null;
   purchaseOrderId?: number | null;
   fromLotId?: number;
+  purchaseLineId?: number;
   reason: string;
 }
 
