@@ -43,7 +43,13 @@ export async function faultsOf(em: EntityManager, broken: ReadonlySet<string>): 
      SELECT 'I1: item ' || COALESCE(b.lot_id, b.hardware_id) || ' has ' || b.reserved || ' held, jobs hold ' || COALESCE(r.held, 0)
      FROM stock_balance b LEFT JOIN (SELECT lot_id, hardware_id, SUM(open) AS held FROM reservation
        GROUP BY lot_id, hardware_id) r ON r.lot_id IS b.lot_id AND r.hardware_id IS b.hardware_id
-     WHERE COALESCE(r.held, 0) <> b.reserved`,
+     WHERE COALESCE(r.held, 0) <> b.reserved
+     UNION ALL
+     SELECT 'I1: line ' || l.id || ' has ' || COALESCE(-m.moved, 0) || ' out' FROM purchase_line l
+     JOIN purchase_order p ON p.id = l.purchase_order_id
+     LEFT JOIN (SELECT purchase_line_id, SUM(quantity) AS moved FROM stock_movement GROUP BY 1) m ON m.purchase_line_id = l.id
+     WHERE l.service IS NOT NULL AND COALESCE(-m.moved, 0) <>
+       CASE WHEN l.received > 0 OR p.state = 'sent' THEN l.quantity ELSE 0 END`,
   );
   faults.push(...unequal.map(({ fault }) => fault));
   const short = await em.execute<{ lot: number | null; hardware: number | null }[]>(
@@ -61,10 +67,12 @@ export async function faultsOf(em: EntityManager, broken: ReadonlySet<string>): 
   return faults;
 }
 
-/** What lies on the way where one press does two things: a ticket that is finished at once was begun as well. */
+/** What lies on the way where one press does two things: a ticket that is finished at once was begun as well, and what is new
+ * and sent was drafted. */
 const onTheWay: Record<string, string> = {
   'ready finished': 'at the bench',
   'taken on packed': 'in work',
+  'undefined sent': 'draft',
 };
 
 /** Changes of state without exactly one row of the log each, by whoever did it: [I8]. */

@@ -41,7 +41,7 @@ export const buyingRules: Rule[] = [
     HAVING COALESCE(-SUM(m.quantity), 0) <> CASE WHEN n.received > 0 OR (n.closed = 0 AND p.state IN ('sent', 'part received'))
         THEN n.quantity ELSE 0 END
       OR (COALESCE(SUM(m.quantity), 0) = 0 AND COALESCE(SUM(m.value), 0) <> 0)
-      OR SUM(m.lot_id IS NOT n.from_lot_id OR m.purchase_order_id IS NOT n.purchase_order_id) > 0`,
+      OR SUM(m.lot_id <> n.from_lot_id OR m.purchase_order_id <> n.purchase_order_id) > 0`,
   ),
   none(
     'What came back from a service bears what the leather had cost that went out, to the cent',

@@ -17,6 +17,8 @@ let supplierId: number;
 const jobIds: number[] = [];
 const lotIds: number[] = [];
 const orderIds: number[] = [];
+/** Orders that have a lot worked on. */
+const workIds: number[] = [];
 /** Things of which an honest count said that less is there than is held. */
 const broken = new Set<string>();
 const names = { owner: 'The owner', maker: 'The maker' };
@@ -26,7 +28,7 @@ const sequencesPerShop = 15;
 
 async function openShop(): Promise<void> {
   ready = await readyForTheBench(await startTestShop());
-  for (const kept of [jobIds, lotIds, orderIds]) kept.length = 0;
+  for (const kept of [jobIds, lotIds, orderIds, workIds]) kept.length = 0;
   broken.clear();
   supplierId = ((await send('owner', '/suppliers', { name: 'Oldbeck Tannery' })) as { id: number })
     .id;
@@ -106,6 +108,40 @@ const commands = {
     const hardware = [{ hardwareId: ready.hardwareId, purchaseLineId, quantity: much * 5 }];
     await send('maker', '/receipts', { purchaseOrderId, hardware, nothingMore: much % 3 === 0 });
     return 'maker';
+  },
+  sendOut: async ({ a, b, much }: Command): Promise<Role> => {
+    const line = {
+      ...{ of: 'service', service: 'dyeing', lotId: pick(lotIds, b) },
+      ...{ becomesLeatherId: ready.leatherId, fixedPrice: '12.37' },
+      ...(a % 2 === 0 && { areaMm2: ft2(much) }),
+    };
+    const reply = await send('owner', '/purchase-orders', { supplierId, lines: [line] });
+    const id = (reply as { id: number } | undefined)?.id;
+    if (id === undefined) return 'owner';
+    workIds.push(id);
+    await send('owner', `/purchase-orders/${id}/sendings`, { by: 'hand' });
+    return 'owner';
+  },
+  comeBack: async ({ a, b, much }: Command): Promise<Role> => {
+    const purchaseOrderId = pick(workIds, a);
+    if (purchaseOrderId === undefined) return 'maker';
+    const order = (await ready.shop.as('maker').get(`/api/purchase-orders/${purchaseOrderId}`))
+      .body as { lines: { id: number }[] };
+    const lot = {
+      ...{ leatherId: ready.leatherId, purchaseLineId: order.lines[0]?.id },
+      ...{ form: 'side', measuredAreaMm2: ft2(much) },
+    };
+    const lots = b % 2 === 0 ? [lot] : [lot, { ...lot, measuredAreaMm2: ft2(much + 1) }];
+    const reply = (await send('maker', '/receipts', { purchaseOrderId, lots })) as
+      { lots: { id: number }[] } | undefined;
+    lotIds.push(...(reply?.lots ?? []).map(({ id }) => id));
+    return 'maker';
+  },
+  callOff: async ({ a }: Command): Promise<Role> => {
+    const id = pick(workIds, a);
+    const body = { reason: 'too dear' };
+    if (id !== undefined) await send('owner', `/purchase-orders/${id}/cancellations`, body);
+    return 'owner';
   },
   sendBack: async ({ a, much }: Command): Promise<Role> => {
     const id = pick(orderIds, a);
