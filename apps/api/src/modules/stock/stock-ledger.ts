@@ -3,12 +3,12 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { describeItem } from './described-item.ts';
-import { holdersOf } from './holders-of.ts';
 import { Reservation } from './reservation.entity.ts';
 import { balanceOf, move } from './stock-rows.ts';
 import { StockBalance } from './stock-balance.entity.ts';
 import { itemOf, keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
+import { notFreeToGo, requireQuantity, tooLittle } from './stock-refusals.ts';
 import { costOfComing, costOfGoing, shareOfCost } from './stock-value.ts';
 import { takenBy } from './taken-by-job.ts';
 
@@ -77,7 +77,8 @@ export async function reserveStock(
 ): Promise<Reservation> {
   requireQuantity(asked.quantity);
   const { free } = await freeOf(work.em, asked);
-  if (asked.quantity > free) throw await tooLittle(work, asked, asked.quantity, free);
+  if (asked.quantity > free)
+    throw await tooLittle(work, asked, { asked: asked.quantity, most: free });
   const balance = await balanceOf(work.em, asked);
   balance.reserved += asked.quantity;
   const { jobId, quantity } = asked;
@@ -102,7 +103,7 @@ export async function takeStock(work: Work, asked: Taken & StockItem): Promise<S
   const held = jobId === null ? [] : await openReservations(work.em, { ...keysOf(asked), jobId });
   const own = held.reduce((sum, reservation) => sum + reservation.open, 0);
   const most = Math.min(onHand, own + free);
-  if (quantity > most) throw await tooLittle(work, asked, quantity, most);
+  if (quantity > most) throw await tooLittle(work, asked, { asked: quantity, most });
   const value = (await costOfGoing(work.em, asked, quantity)).negated();
   await useHeld(work.em, held, quantity);
   return move(work, asked, { kind: 'take', quantity: -quantity, value, jobId, reason });
@@ -199,7 +200,7 @@ interface Out {
 export async function sendOut(work: Work, { lotId, ...out }: Out): Promise<StockMovement> {
   requireQuantity(out.quantity);
   const { free } = await freeOf(work.em, { lotId });
-  if (out.quantity > free) throw await notFreeToGo(work, { lotId, ...out }, free);
+  if (out.quantity > free) throw await notFreeToGo(work, { lotId, quantity: out.quantity, free });
   const value = (await costOfGoing(work.em, { lotId }, out.quantity)).negated();
   return move(work, { lotId }, { kind: 'take', ...out, quantity: -out.quantity, value });
 }
@@ -317,27 +318,4 @@ async function useHeld(em: EntityManager, held: Reservation[], quantity: number)
     reservation.open -= used;
     left -= used;
   }
-}
-
-async function tooLittle(work: Work, item: StockItem, asked: number, most: number) {
-  const { name, say } = await describeItem(work.em, item);
-  return wrongState(
-    `There is ${say(most)} of ${name} to be had, and ${say(asked)} was asked for. Ask for less, or receive more first.`,
-    most > 0 ? [`up to ${say(most)}`] : [],
-  );
-}
-
-async function notFreeToGo(work: Work, { lotId, quantity }: Out, free: number) {
-  const { name, say } = await describeItem(work.em, { lotId });
-  const holders = await holdersOf(work.em, { lotId });
-  const held = holders.length === 0 ? '' : ` Held: ${holders.join(', ')}.`;
-  return wrongState(
-    `Of ${name} ${say(free)} is free now, and ${say(quantity)} is to go out.${held} Change the line to what is free, or let the job go first.`,
-    free > 0 ? [`send out up to ${say(free)}`] : [],
-  );
-}
-
-function requireQuantity(quantity: number): void {
-  if (Number.isSafeInteger(quantity) && quantity > 0) return;
-  throw invalid([{ field: 'quantity', message: 'Enter a quantity above 0.' }]);
 }

@@ -1,4 +1,11 @@
-import { listLots, readLot, readLotDrawing, readLotSearch } from '@hidewright/contract';
+import {
+  listLots,
+  readLot,
+  readLotDrawing,
+  readLotSearch,
+  type Lot,
+  type ReplyOf,
+} from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -18,6 +25,23 @@ export function lotsQuery(wanted: Wanted = {}) {
       }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
+  });
+}
+
+/** Every lot on the rack, to choose one from. */
+export function rackQuery() {
+  return queryOptions({
+    queryKey: ['lots', 'rack'],
+    queryFn: async ({ signal }) => {
+      const lots: Lot[] = [];
+      for (let cursor: string | null = ''; cursor !== null;) {
+        const query = { onRack: 'yes' as const, limit: 200, ...(cursor && { cursor }) };
+        const page: ReplyOf<typeof listLots> = await call(listLots, { query, signal });
+        lots.push(...page.items);
+        cursor = page.next;
+      }
+      return lots;
+    },
   });
 }
 

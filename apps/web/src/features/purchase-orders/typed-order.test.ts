@@ -1,5 +1,6 @@
+import type { PurchaseOrder } from '@hidewright/contract';
 import { describe, expect, it } from 'vitest';
-import { amountOf, blankLine } from './typed-order.ts';
+import { amountOf, blankLine, blankService, typedOf } from './typed-order.ts';
 
 describe('an order as it is typed', () => {
   it('adds up what is filled in, each line to the cent', () => {
@@ -23,5 +24,35 @@ describe('an order as it is typed', () => {
       quantity: 500,
       unitPrice: '0.17',
     });
+  });
+});
+
+describe('work on a lot', () => {
+  const lot = {
+    ...{ id: 7, tag: 'T-0007', leatherId: 1, leatherName: 'Oak tan' },
+    freeAreaMm2: '2229672.96',
+  } as const;
+
+  it('costs its price per ft² of all that is free, of what is typed, or for the lot', () => {
+    const work = { ...blankService(lot), unitPrice: '1.50' };
+    expect(amountOf([work], [lot])).toBe('36.00');
+    expect(amountOf([{ ...work, areaMm2: '929030.4' }], [lot])).toBe('15.00');
+    expect(amountOf([{ ...work, unitPrice: null, fixedPrice: '22.5' }], [lot])).toBe('22.50');
+    expect(amountOf([work])).toBe('0.00');
+  });
+
+  it('is typed again as its draft has it', () => {
+    const line = {
+      ...{ of: 'service', leatherId: null, hardwareId: null, areaMm2: '929030.4' },
+      ...{ unitPrice: '0.00', fixedPrice: '22.50' },
+      service: { word: 'splitting', lotId: 7, becomesLeatherId: 3 },
+    };
+    const order = { supplierId: 2, expectedOn: null, note: '', lines: [line] };
+    expect(typedOf(order as unknown as PurchaseOrder).lines).toEqual([
+      {
+        ...{ of: 'service', service: 'splitting', lotId: 7, areaMm2: '929030.4' },
+        ...{ becomesLeatherId: 3, unitPrice: null, fixedPrice: '22.50' },
+      },
+    ]);
   });
 });

@@ -4,6 +4,7 @@ import { blankLot, deliveryOf, isOpen, nextLot, withoutWhatCame } from './typed-
 
 const nothing = { areaMm2: null, quantity: null };
 const none = {
+  service: null,
   areaMm2: null,
   receivedAreaMm2: null,
   quantity: null,
@@ -54,6 +55,15 @@ describe('a delivery', () => {
       lots: [{ leatherId: 5, purchaseLineId: 1, measuredAreaMm2: '' }],
       hardware: [{ hardwareId: 6, purchaseLineId: 2, quantity: 600 }],
     });
+  });
+
+  it('begins with the leather that went out, as what it has become', () => {
+    const service = { lotForm: 'bend', becomesLeatherId: 8, lotTag: 'T-0007' };
+    const out = { ...leather(1, 'Dyeing of T-0007', '40', '40'), leatherId: null, service };
+    const order = { id: 9, lines: [out], receipts: 0 } as unknown as PurchaseOrder;
+    expect(deliveryOf(order, '2026-12-01').lots).toMatchObject([
+      { leatherId: 8, purchaseLineId: 1, form: 'bend', measuredAreaMm2: '40' },
+    ]);
   });
 
   it('keeps what was typed and loses what somebody else has received', () => {

@@ -45,6 +45,12 @@ export function blankHardware(
   };
 }
 
+/** What comes back from a service, as it was before but for its leather, with its area to be measured anew. */
+export function lotBack({ id, service }: PurchaseLine, measuredAreaMm2: string): TypedLot {
+  const blank = blankLot(service?.becomesLeatherId, id);
+  return { ...blank, form: service?.lotForm ?? blank.form, measuredAreaMm2 };
+}
+
 /** The next lot after one of the same leather: as a rule it has the same form and shade, and hangs beside it. */
 export function nextLot(before: TypedLot | undefined, blank: TypedLot): TypedLot {
   if (before === undefined) return blank;
@@ -59,9 +65,10 @@ export function deliveryOf(order: PurchaseOrder, today: string): TypedDelivery {
     ...blankDelivery(today),
     purchaseOrderId: order.id,
     receiptsSeen: order.receipts,
-    lots: open.flatMap((line) =>
-      line.leatherId === null ? [] : [blankLot(line.leatherId, line.id)],
-    ),
+    lots: open.flatMap((line) => {
+      if (line.service !== null) return [lotBack(line, line.toCome.areaMm2 ?? '')];
+      return line.leatherId === null ? [] : [blankLot(line.leatherId, line.id)];
+    }),
     hardware: open.flatMap((line) =>
       line.hardwareId === null
         ? []

@@ -34,7 +34,7 @@ export async function loader({ params }: LoaderFunctionArgs) {
 
 export function Component() {
   const { id } = useLoaderData<Lot>();
-  const { handlesStock } = useRole();
+  const { isOwner, handlesStock } = useRole();
   const { lengthUnit } = useWorkshop();
   const { data: lot } = useSuspenseQuery(lotQuery(id));
   const item = { lotId: id };
@@ -47,7 +47,16 @@ export function Component() {
         title={lot.leatherName}
         detail={formText(lot, lengthUnit)}
         actions={
-          handlesStock && <LinkButton to={`/stockroom/tags?lots=${id}`}>Print its tag</LinkButton>
+          handlesStock && (
+            <>
+              <LinkButton to={`/stockroom/tags?lots=${id}`}>Print its tag</LinkButton>
+              {isOwner && lot.freeAreaMm2 !== '0' && (
+                <LinkButton to={`/stockroom/purchase-orders/new?lot=${id}`}>
+                  Have it worked on
+                </LinkButton>
+              )}
+            </>
+          )
         }
       />
       <ItemLayout

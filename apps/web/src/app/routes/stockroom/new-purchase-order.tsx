@@ -8,6 +8,8 @@ import { useAddPurchaseOrder } from '../../../features/purchase-orders/purchase-
 import {
   blankLine,
   blankOrder,
+  blankService,
+  type FreeLot,
   type Goods,
   type TypedOrder,
 } from '../../../features/purchase-orders/typed-order.ts';
@@ -48,10 +50,10 @@ export function Component() {
   );
 }
 
-/** An order that was begun from a leather, hardware or a supplier has it in it. */
+/** An order that was begun from a leather, hardware, a lot or a supplier has it in it. */
 function startWith(
   search: URLSearchParams,
-  { leathers, hardware }: { leathers: Goods[]; hardware: Goods[] },
+  { leathers, hardware, lots }: { leathers: Goods[]; hardware: Goods[]; lots: FreeLot[] },
 ): Partial<TypedOrder> {
   const named = (goods: Goods[], name: string) =>
     goods.filter(({ id }) => String(id) === search.get(name));
@@ -62,6 +64,7 @@ function startWith(
     lines: [
       ...named(leathers, 'leather').map((goods) => blankLine('leather', goods)),
       ...named(hardware, 'hardware').map((goods) => blankLine('hardware', goods)),
+      ...lots.filter(({ id }) => String(id) === search.get('lot')).map(blankService),
     ],
   };
 }

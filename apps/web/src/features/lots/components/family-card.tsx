@@ -53,7 +53,8 @@ export function FamilyCard({ lotId, handlesStock }: FamilyCardProps) {
 function Member({ lot, isThis }: { lot: FamilyMember; isThis: boolean }) {
   const { areaUnit } = useWorkshop();
   const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
-  const words = [lot.form, lot.shade, lot.place].filter((word) => word !== '').join(', ');
+  const after = lot.service === null ? '' : `after ${lot.service}`;
+  const words = [after, lot.form, lot.shade, lot.place].filter((word) => word !== '').join(', ');
   return (
     <div className="flex flex-wrap items-center justify-between gap-x-4">
       <span aria-current={isThis ? 'true' : undefined}>
@@ -70,9 +71,11 @@ function Member({ lot, isThis }: { lot: FamilyMember; isThis: boolean }) {
 }
 
 function leftOf(
-  { onHandAreaMm2, measuredAreaMm2 }: FamilyMember,
+  { onHandAreaMm2, measuredAreaMm2, outAreaMm2 }: FamilyMember,
   area: (areaMm2: string) => string,
 ): string {
+  if (outAreaMm2 !== '0')
+    return `${area(measuredAreaMm2)}, ${area(outAreaMm2)} out, ${area(onHandAreaMm2)} left`;
   if (onHandAreaMm2 === '0') return `${area(measuredAreaMm2)}, used up`;
   if (onHandAreaMm2 === measuredAreaMm2) return `${area(measuredAreaMm2)}, all there`;
   return `${area(measuredAreaMm2)}, ${area(onHandAreaMm2)} left`;

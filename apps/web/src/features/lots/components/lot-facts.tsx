@@ -1,5 +1,6 @@
-import type { Lot } from '@hidewright/contract';
+import type { Lot, OutFor } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
+import { Notice } from '../../../components/notice.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { rackAreaText, dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -31,6 +32,9 @@ export function LotFacts({ lot }: { lot: Lot }) {
           { word: 'Free', figure: area(lot.freeAreaMm2) },
         ]}
       />
+      {lot.outFor.map((out) => (
+        <OutNotice key={`${out.purchaseOrderId} ${out.areaMm2}`} out={out} />
+      ))}
       <KeyFigures
         figures={[
           {
@@ -49,6 +53,27 @@ export function LotFacts({ lot }: { lot: Lot }) {
         ]}
       />
     </div>
+  );
+}
+
+/** 24.8 ft² out for dyeing at Fen Dye Works, P-0012, awaited Wed 9 Dec */
+function OutNotice({ out }: { out: OutFor }) {
+  const workshop = useWorkshop();
+  const { areaMm2, service, supplierName, expectedOn, becomesName } = out;
+  const late = expectedOn !== null && expectedOn < workshop.today;
+  return (
+    <Notice
+      tone={late ? 'attention' : 'info'}
+      title={`${rackAreaText(areaMm2, workshop)} out for ${service}`}
+    >
+      at {supplierName},{' '}
+      <TextLink to={`/stockroom/purchase-orders/${out.purchaseOrderId}`}>
+        {out.purchaseOrderNumber}
+      </TextLink>
+      {expectedOn !== null &&
+        `, ${late ? 'late: was awaited' : 'awaited'} ${dayText(expectedOn, workshop.today)}`}
+      {`. It becomes ${becomesName}.`}
+    </Notice>
   );
 }
 

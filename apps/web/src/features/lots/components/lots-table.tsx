@@ -10,6 +10,18 @@ import { formText } from '../lot-words.ts';
 
 const sumOf = (values: readonly string[]) => Decimal.sum(0, ...values).toFixed();
 
+/** What is on the rack, and what of it is out. */
+function OnHand({ lot, area }: { lot: Lot; area: (areaMm2: string) => string }) {
+  if (lot.outFor.length === 0) return area(lot.onHandAreaMm2);
+  const out = sumOf(lot.outFor.map(({ areaMm2 }) => areaMm2));
+  return (
+    <>
+      {area(lot.onHandAreaMm2)}
+      <span className="block text-sm text-ink-soft">{area(out)} out</span>
+    </>
+  );
+}
+
 function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
   const { lengthUnit, currency, today } = workshop;
   const area = (areaMm2: string) => rackAreaText(areaMm2, workshop);
@@ -44,7 +56,7 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
       id: 'onHand',
       header: 'On hand',
       value: (row) => row.onHandAreaMm2,
-      cell: (row) => area(row.onHandAreaMm2),
+      cell: (row) => <OnHand lot={row} area={area} />,
       align: 'right',
       total: (rows) => area(sumOf(rows.map((row) => row.onHandAreaMm2))),
     },

@@ -4,6 +4,7 @@ import { Form } from '../../../components/form.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { useCancelPurchaseOrder } from '../purchase-orders.mutations.ts';
+import { lotsOf } from '../service-words.ts';
 
 interface CancelOrderDialogProps {
   order: PurchaseOrder;
@@ -13,16 +14,17 @@ interface CancelOrderDialogProps {
 
 export function CancelOrderDialog({ order, open, onOpenChange }: CancelOrderDialogProps) {
   const cancel = useCancelPurchaseOrder();
+  const lots = lotsOf(order);
   return (
     <Dialog
       open={open}
       onOpenChange={onOpenChange}
       title={`Cancel ${order.number}?`}
-      description={
-        order.state === 'sent'
-          ? 'The supplier is not told: tell them yourself. It cannot be taken up again.'
-          : 'It cannot be taken up again.'
-      }
+      description={[
+        ...(order.state === 'sent' ? ['The supplier is not told: tell them yourself.'] : []),
+        ...(order.state === 'sent' && lots !== '' ? [`What is out of ${lots} is back on it.`] : []),
+        'It cannot be taken up again.',
+      ].join(' ')}
     >
       <Form
         schema={cancelPurchaseOrder.body}

@@ -3,6 +3,7 @@ import { Button } from '../../../components/button.tsx';
 import { dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { goodsText, isNothing } from '../goods-text.ts';
+import { whereItIs } from '../service-words.ts';
 
 interface LineProgressProps {
   line: PurchaseLine;
@@ -28,6 +29,8 @@ export function LineProgress(props: LineProgressProps) {
         )}
       </span>
     );
+  const where = whereItIs(line);
+  if (where !== undefined) return where;
   const awaited = order.state === 'sent' || order.state === 'part received';
   if (!awaited) return '–';
   if (isNothing(toCome)) return 'all here';
@@ -44,7 +47,11 @@ export function LineProgress(props: LineProgressProps) {
         <LineButton onClick={onChangeDay} word="Another day" of={` for ${line.name}`} />
       )}
       {onCloseLine && (
-        <LineButton onClick={onCloseLine} word="Nothing more" of={` of ${line.name}`} />
+        <LineButton
+          onClick={onCloseLine}
+          word={line.service === null ? 'Nothing more' : 'Call it off'}
+          of={line.service === null ? ` of ${line.name}` : `: ${line.name}`}
+        />
       )}
     </span>
   );

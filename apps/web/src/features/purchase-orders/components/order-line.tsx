@@ -5,11 +5,11 @@ import { AreaField } from '../../../components/area-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
-import type { Goods, TypedLine } from '../typed-order.ts';
+import type { Goods } from '../typed-order.ts';
 
 interface OrderLineProps {
   at: number;
-  of: TypedLine['of'];
+  of: 'leather' | 'hardware';
   goods: readonly Goods[];
   onRemove: () => void;
 }

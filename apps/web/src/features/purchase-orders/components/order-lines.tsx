@@ -3,34 +3,54 @@ import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { amountOf, blankLine, type Goods, type TypedLine } from '../typed-order.ts';
+import {
+  amountOf,
+  blankLine,
+  blankService,
+  type FreeLot,
+  type Goods,
+  type TypedLine,
+} from '../typed-order.ts';
 import { OrderLine } from './order-line.tsx';
+import { ServiceLine } from './service-line.tsx';
 
 interface OrderLinesProps {
   leathers: readonly Goods[];
   hardware: readonly Goods[];
+  /** What can go out to be worked on. */
+  lots: readonly FreeLot[];
 }
 
 /** What is ordered, line by line, and what it comes to. */
-export function OrderLines({ leathers, hardware }: OrderLinesProps) {
+export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
   const { fields, append, remove } = useFieldArray<{ lines: TypedLine[] }>({ name: 'lines' });
   const { currency } = useWorkshop();
   const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
-  const add = (of: TypedLine['of']) =>
+  const add = (of: 'leather' | 'hardware') =>
     append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
   return (
     <fieldset>
       <legend className="mb-3 text-lg font-semibold">What to order</legend>
       <div className="space-y-5">
-        {fields.map((field, at) => (
-          <OrderLine
-            key={field.id}
-            at={at}
-            of={field.of}
-            goods={field.of === 'leather' ? leathers : hardware}
-            onRemove={() => remove(at)}
-          />
-        ))}
+        {fields.map((field, at) =>
+          field.of === 'service' ? (
+            <ServiceLine
+              key={field.id}
+              at={at}
+              lots={lots}
+              leathers={leathers}
+              onRemove={() => remove(at)}
+            />
+          ) : (
+            <OrderLine
+              key={field.id}
+              at={at}
+              of={field.of}
+              goods={field.of === 'leather' ? leathers : hardware}
+              onRemove={() => remove(at)}
+            />
+          ),
+        )}
       </div>
       <div className="mt-2 -ml-3 flex flex-wrap">
         <Button tone="quiet" onClick={() => add('leather')}>
@@ -39,9 +59,17 @@ export function OrderLines({ leathers, hardware }: OrderLinesProps) {
         <Button tone="quiet" onClick={() => add('hardware')}>
           <Plus size={18} aria-hidden="true" /> Hardware or supplies
         </Button>
+        {lots.length > 0 && (
+          <Button
+            tone="quiet"
+            onClick={() => append(blankService(), { focusName: `lines.${fields.length}.service` })}
+          >
+            <Plus size={18} aria-hidden="true" /> Work on a lot
+          </Button>
+        )}
       </div>
       <p className="mt-3 font-semibold">
-        Together {currency} {moneyText(amountOf(lines))}
+        Together {currency} {moneyText(amountOf(lines, lots))}
         <span className="font-normal text-ink-soft">, before carriage and tax</span>
       </p>
     </fieldset>

@@ -13,10 +13,33 @@ import { CloseLineDialog } from './close-line-dialog.tsx';
 import { LineProgress } from './line-progress.tsx';
 import { ReopenDialog } from './reopen-dialog.tsx';
 
-const placeOf = (line: PurchaseLine) =>
-  line.of === 'leather'
-    ? `/stockroom/leather/${line.leatherId}`
-    : `/stockroom/hardware/${line.hardwareId}`;
+const placeOf = ({ service, leatherId, hardwareId }: PurchaseLine) => {
+  if (service !== null) return `/stockroom/lots/${service.lotId}`;
+  return leatherId === null
+    ? `/stockroom/hardware/${hardwareId}`
+    : `/stockroom/leather/${leatherId}`;
+};
+
+/** What is ordered; of work on a lot, also what it becomes. */
+function NameOf({ line }: { line: PurchaseLine }) {
+  const { service } = line;
+  return (
+    <span className="block text-left">
+      <TextLink to={placeOf(line)}>{line.name}</TextLink>
+      {service?.changes && (
+        <span className="block text-sm font-normal text-ink-soft">
+          becomes {service.becomesName}
+        </span>
+      )}
+    </span>
+  );
+}
+
+function PriceOf({ line: { of, unitPrice, fixedPrice = null } }: { line: PurchaseLine }) {
+  if (fixedPrice !== null) return `${moneyText(fixedPrice)} for the lot`;
+  if (unitPrice === undefined) return null;
+  return `${unitPriceText(unitPrice)} ${of === 'hardware' ? 'each' : 'per ft²'}`;
+}
 
 function priceColumns(currency: string, order: PurchaseOrder): Column<PurchaseLine>[] {
   const ordered: Column<PurchaseLine>[] = [
@@ -24,9 +47,7 @@ function priceColumns(currency: string, order: PurchaseOrder): Column<PurchaseLi
       id: 'price',
       header: `Price, ${currency}`,
       value: (row) => row.unitPrice,
-      cell: (row) =>
-        row.unitPrice !== undefined &&
-        `${unitPriceText(row.unitPrice)} ${row.of === 'leather' ? 'per ft²' : 'each'}`,
+      cell: (row) => <PriceOf line={row} />,
       align: 'right',
     },
     {
@@ -89,7 +110,7 @@ function columnsFor(
       id: 'name',
       header: 'What',
       value: (row) => row.name,
-      cell: (row) => <TextLink to={placeOf(row)}>{row.name}</TextLink>,
+      cell: (row) => <NameOf line={row} />,
       onPhone: 'title',
     },
     {

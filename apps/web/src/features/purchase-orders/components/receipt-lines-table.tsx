@@ -44,6 +44,7 @@ function MarkedOf({
 const usesOf = ({ lines }: Receipt) => ({
   marked: lines.some((line) => line.marked !== null),
   batch: lines.some((line) => line.batch !== ''),
+  material: lines.some(({ material = '0.00' }) => material !== '0.00'),
   costs: lines.some((line) => line.goods !== undefined),
 });
 
@@ -63,7 +64,7 @@ function columnsFor(workshop: Workshop, receipt: Receipt): Column<ReceiptLine>[]
     value: (row) => row.batch,
     cell: (row) => row.batch || '–',
   };
-  const amount = (id: 'goods' | 'carriage', header: string): Column<ReceiptLine> => ({
+  const amount = (id: 'goods' | 'carriage' | 'material', header: string): Column<ReceiptLine> => ({
     id,
     header: `${header}, ${currency}`,
     value: (row) => row[id],
@@ -88,7 +89,13 @@ function columnsFor(workshop: Workshop, receipt: Receipt): Column<ReceiptLine>[]
     },
     ...(uses.marked ? [marked] : []),
     ...(uses.batch ? [batch] : []),
-    ...(uses.costs ? [amount('goods', 'Goods'), amount('carriage', 'Freight and duty')] : []),
+    ...(uses.material ? [amount('material', 'Leather before')] : []),
+    ...(uses.costs
+      ? [
+          amount('goods', uses.material ? 'Goods and work' : 'Goods'),
+          amount('carriage', 'Freight and duty'),
+        ]
+      : []),
   ];
 }
 

@@ -4,6 +4,7 @@ import { Form } from '../../../components/form.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
 import { say } from '../../../components/toast.ts';
 import { useSendPurchaseOrder } from '../purchase-orders.mutations.ts';
+import { lotsOf } from '../service-words.ts';
 
 interface SendOrderDialogProps {
   order: PurchaseOrder;
@@ -14,6 +15,7 @@ interface SendOrderDialogProps {
 export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogProps) {
   const send = useSendPurchaseOrder();
   const { supplierEmail } = order;
+  const lots = lotsOf(order);
   const cards = [
     ...(supplierEmail === ''
       ? []
@@ -29,7 +31,7 @@ export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogPr
       open={open}
       onOpenChange={onOpenChange}
       title={`Send ${order.number} to ${order.supplierName}`}
-      description="Once it is sent it cannot be changed; until something has come it can be cancelled."
+      description={`${lots === '' ? '' : `${lots} goes off the rack with it. `}Once it is sent it cannot be changed; until something has come it can be cancelled.`}
     >
       <Form
         schema={sendPurchaseOrder.body}

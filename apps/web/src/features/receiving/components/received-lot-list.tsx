@@ -5,7 +5,7 @@ import { Button } from '../../../components/button.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
 import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { blankLot, isOpen, nextLot, type TypedLot } from '../typed-delivery.ts';
+import { blankLot, isOpen, lotBack, nextLot, type TypedLot } from '../typed-delivery.ts';
 import { ReceivedLot } from './received-lot.tsx';
 
 interface ReceivedLotListProps {
@@ -20,18 +20,21 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
   const { lines, leathers, tolerancePercent, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
   const workshop = useWorkshop();
-  const open = lines.filter((line) => line.of === 'leather' && isOpen(line));
+  const open = lines.filter((line) => line.of !== 'hardware' && isOpen(line));
   const { getValues } = useFormContext<{ lots: TypedLot[] }>();
 
   function addOf(line: PurchaseLine) {
     const before = getValues('lots').findLast((lot) => lot.purchaseLineId === line.id);
-    append(nextLot(before, blankLot(line.leatherId ?? undefined, line.id)), {
-      focusName: `lots.${fields.length}.markedAreaMm2`,
-    });
+    const blank =
+      line.service === null ? blankLot(line.leatherId ?? undefined, line.id) : lotBack(line, '');
+    const field = line.service === null ? 'markedAreaMm2' : 'measuredAreaMm2';
+    append(nextLot(before, blank), { focusName: `lots.${fields.length}.${field}` });
   }
 
-  const toCome = ({ toCome: { areaMm2 } }: PurchaseLine) =>
-    areaMm2 === null ? '' : `${rackAreaText(areaMm2, workshop)} to come`;
+  const toCome = ({ service, toCome: { areaMm2 } }: PurchaseLine) =>
+    areaMm2 === null
+      ? ''
+      : `${rackAreaText(areaMm2, workshop)} ${service === null ? 'to come' : 'went out'}`;
 
   if (lines.length > 0 && open.length + fields.length === 0) return null;
   return (
@@ -44,7 +47,9 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
             <ReceivedLot
               key={field.id}
               at={at}
-              ordered={line && { name: line.name, toCome: toCome(line) }}
+              ordered={
+                line && { name: line.name, toCome: toCome(line), isWork: line.of === 'service' }
+              }
               leathers={leathers}
               tolerancePercent={tolerancePercent}
               mayPrice={mayPrice}
@@ -56,7 +61,10 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
       <div className="mt-3 flex flex-wrap gap-2">
         {open.map((line) => (
           <Button key={line.id} className="min-h-11" onClick={() => addOf(line)}>
-            <Plus size={18} aria-hidden="true" /> A lot of {line.name}
+            <Plus size={18} aria-hidden="true" />
+            {line.service === null
+              ? `A lot of ${line.name}`
+              : `Another lot from ${line.service.lotTag}`}
           </Button>
         ))}
         {lines.length === 0 && (

@@ -18,7 +18,7 @@ const cutToSize: readonly LotForm[] = ['panel', 'strip', 'offcut'];
 interface ReceivedLotProps {
   at: number;
   /** The line of the order that it belongs to. */
-  ordered: { name: string; toCome: string } | undefined;
+  ordered: { name: string; toCome: string; isWork: boolean } | undefined;
   leathers: readonly Choice[];
   tolerancePercent: string;
   mayPrice: boolean;
@@ -30,6 +30,7 @@ export function ReceivedLot(props: ReceivedLotProps) {
   const { at, ordered, leathers, tolerancePercent, mayPrice, onRemove } = props;
   const lot = `lots.${at}`;
   const form = useWatch({ name: `${lot}.form` }) as LotForm;
+  const isWork = ordered?.isWork ?? false;
   return (
     <div
       role="group"
@@ -53,29 +54,23 @@ export function ReceivedLot(props: ReceivedLotProps) {
         </Button>
       </div>
       <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
-        {!ordered && (
+        {(!ordered || isWork) && (
           <SelectField
             name={`${lot}.leatherId`}
-            label="Leather"
+            label={isWork ? 'It is now' : 'Leather'}
             placeholder="Choose a leather"
             choices={leathers}
           />
         )}
-        <div className="grid grid-cols-2 gap-x-4 sm:col-span-2">
-          <AreaField
-            name={`${lot}.markedAreaMm2`}
-            label="Marked area"
-            optional
-            whenEmpty="null"
-            help="As stamped on it: 24.75 or 24³."
-          />
+        {isWork ? (
           <AreaField
             name={`${lot}.measuredAreaMm2`}
             label="Measured area"
-            help="As measured here."
+            help="As it went out: measure it anew."
           />
-        </div>
-        <MarkCheck lot={lot} tolerancePercent={tolerancePercent} />
+        ) : (
+          <Areas lot={lot} tolerancePercent={tolerancePercent} />
+        )}
         <SelectField name={`${lot}.form`} label="Form" choices={forms} />
         {cutToSize.includes(form) && (
           <>
@@ -88,15 +83,46 @@ export function ReceivedLot(props: ReceivedLotProps) {
         <TextField name={`${lot}.place`} label="Place" optional />
         <TagField name={`${lot}.tag`} />
       </div>
-      <MoreOfLot lot={lot} mayPrice={mayPrice} />
+      {isWork && (
+        <p className="mt-3 max-w-prose text-sm text-ink-soft">
+          Look it over for flaws again: the drawing and photo stay with the lot that went out. Hang
+          a new tag on it.
+        </p>
+      )}
+      <MoreOfLot lot={lot} mayPrice={mayPrice} isWork={isWork} />
     </div>
+  );
+}
+
+/** As it is stamped on, and as it is measured here. */
+function Areas({ lot, tolerancePercent }: { lot: string; tolerancePercent: string }) {
+  return (
+    <>
+      <div className="grid grid-cols-2 gap-x-4 sm:col-span-2">
+        <AreaField
+          name={`${lot}.markedAreaMm2`}
+          label="Marked area"
+          optional
+          whenEmpty="null"
+          help="As stamped on it: 24.75 or 24³."
+        />
+        <AreaField name={`${lot}.measuredAreaMm2`} label="Measured area" help="As measured here." />
+      </div>
+      <MarkCheck lot={lot} tolerancePercent={tolerancePercent} />
+    </>
   );
 }
 
 const furtherFields = ['grade', 'supplierLot', 'cost'];
 
+interface MoreOfLotProps {
+  lot: string;
+  mayPrice: boolean;
+  isWork: boolean;
+}
+
 /** Opens by itself where something in it must be put right. */
-function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
+function MoreOfLot({ lot, mayPrice, isWork }: MoreOfLotProps) {
   const [asked, setAsked] = useState(false);
   const { errors } = useFormState();
   const wrong = furtherFields.some((field) => get(errors, `${lot}.${field}`) !== undefined);
@@ -114,14 +140,23 @@ function MoreOfLot({ lot, mayPrice }: { lot: string; mayPrice: boolean }) {
       {open && (
         <div className="mt-2 grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
           <TextField name={`${lot}.grade`} label="Grade" optional />
-          <TextField name={`${lot}.supplierLot`} label="Supplier’s lot" optional />
+          <TextField
+            name={`${lot}.supplierLot`}
+            label="Supplier’s lot"
+            optional
+            help={isWork ? 'Left empty, that of the lot that went out.' : undefined}
+          />
           {mayPrice && (
             <MoneyField
               name={`${lot}.cost`}
-              label="Cost of the lot"
+              label={isWork ? 'Cost of the work' : 'Cost of the lot'}
               optional
               whenEmpty="null"
-              help="Left empty, it is the marked area at the price per ft²; without a mark, the measured one."
+              help={
+                isWork
+                  ? 'Left empty, it is its share of the price on the order.'
+                  : 'Left empty, it is the marked area at the price per ft²; without a mark, the measured one.'
+              }
             />
           )}
         </div>
