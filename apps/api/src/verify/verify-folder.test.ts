@@ -187,6 +187,26 @@ describe('verifying a data folder', () => {
       'UPDATE supplier_claim SET missing_area_mm2 = missing_area_mm2 + 1',
       'short of their mark',
     ],
+    [
+      'leather that is out',
+      'UPDATE stock_movement SET value = value - 1, quantity = quantity + 1000 WHERE purchase_line_id IS NOT NULL',
+      'is out on a sent line',
+    ],
+    [
+      'a line that leather is out on',
+      'UPDATE purchase_line SET closed = 1 WHERE service IS NOT NULL',
+      'is out on a sent line',
+    ],
+    [
+      'what leather had cost before a service',
+      'UPDATE receipt_line SET material = 5 WHERE lot_id IS NOT NULL AND purchase_line_id IS NOT NULL',
+      'bears what the leather had cost',
+    ],
+    [
+      'the lot that one hangs on',
+      'UPDATE lot SET parent_id = 2 WHERE parent_id IS NULL AND id > 2',
+      'hangs on the lot that went out',
+    ],
     ['a layout', 'UPDATE layout SET pieces = pieces + 1 WHERE id = 1', 'those that it draws'],
   ])('notices %s that was altered', async (_what, sql, says) => {
     expect(await broken(await alteredCopy(sql))).toEqual(

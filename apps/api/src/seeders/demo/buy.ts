@@ -150,7 +150,7 @@ async function receive(
   });
 }
 
-const blankLot = {
+export const blankLot = {
   tag: '',
   pieces: 1,
   widthMm: null,

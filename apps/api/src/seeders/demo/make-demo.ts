@@ -11,6 +11,7 @@ import { planPurchases } from './buy.ts';
 import { DemoShop } from './demo-shop.ts';
 import { planBorrowedPlate } from './furnish-tooling.ts';
 import { furnish } from './furnish.ts';
+import { planDyeing } from './have-dyed.ts';
 import { planCounts } from './play-counts.ts';
 import { planLocks } from './play-books.ts';
 import { planRun } from './play-run.ts';
@@ -47,6 +48,7 @@ async function playYear(config: Config): Promise<void> {
     for (const run of runs) planRun({ shop, year, furnished }, run);
     planBorrowedPlate({ shop, year, furnished });
     planCounts(shop, year);
+    planDyeing(shop, year);
     planLocks(shop, year);
     year.plan(0, '06:00', async () => {
       await shop.as('owner', lapseQuotes);
