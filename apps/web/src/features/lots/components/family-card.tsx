@@ -74,6 +74,7 @@ function leftOf(
   { onHandAreaMm2, measuredAreaMm2, outAreaMm2 }: FamilyMember,
   area: (areaMm2: string) => string,
 ): string {
+  if (outAreaMm2 === measuredAreaMm2) return `${area(measuredAreaMm2)}, out`;
   if (outAreaMm2 !== '0')
     return `${area(measuredAreaMm2)}, ${area(outAreaMm2)} out, ${area(onHandAreaMm2)} left`;
   if (onHandAreaMm2 === '0') return `${area(measuredAreaMm2)}, used up`;

@@ -29,7 +29,7 @@ export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
   const add = (of: 'leather' | 'hardware') =>
     append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
   return (
-    <fieldset>
+    <fieldset className="min-w-0">
       <legend className="mb-3 text-lg font-semibold">What to order</legend>
       <div className="space-y-5">
         {fields.map((field, at) =>

@@ -18,58 +18,85 @@ interface ServiceLineProps {
 
 /** Work on a lot: which, on how much of it, what it becomes, and what it costs. */
 export function ServiceLine({ at, lots, leathers, onRemove }: ServiceLineProps) {
-  const workshop = useWorkshop();
   const line = `lines.${at}`;
-  const lotId: unknown = useWatch({ name: `${line}.lotId` });
-  const lot = lots.find(({ id }) => String(id) === String(lotId));
-  useSameLeather(line, lot);
-  const free = (each: FreeLot) => rackAreaText(each.freeAreaMm2, workshop);
   return (
     <div
       role="group"
       aria-label={`Line ${at + 1}: work on a lot`}
-      className="flex flex-wrap items-start gap-x-4 gap-y-2"
+      className="max-w-3xl min-w-0 rounded border border-stitch p-4"
     >
-      <div className="w-full sm:w-40">
-        <WorkField name={`${line}.service`} />
+      <div className="mb-2 flex items-start justify-between gap-4">
+        <p className="text-sm text-ink-soft">
+          The lot goes off the rack when the order is sent, and comes back as a new one.
+        </p>
+        <button
+          type="button"
+          onClick={onRemove}
+          aria-label={`Remove line ${at + 1}`}
+          className="-mt-2 -mr-2 grid size-10 shrink-0 place-items-center rounded text-ink-soft hover:bg-manila"
+        >
+          <X size={18} aria-hidden="true" />
+        </button>
       </div>
-      <div className="w-full sm:w-80">
-        <SelectField
-          name={`${line}.lotId`}
-          label="Lot that goes out"
-          placeholder="Choose a lot"
-          choices={lots.map((each) => ({
-            value: each.id,
-            label: `${each.tag}, ${each.leatherName}, ${free(each)} free`,
-          }))}
-        />
-      </div>
-      <AreaField
-        name={`${line}.areaMm2`}
-        label="Area"
-        optional
-        whenEmpty="null"
-        help={lot === undefined ? 'Left empty, all that is free.' : `Left empty, all ${free(lot)}.`}
-      />
-      <div className="w-full sm:w-64">
+      <div className="grid grid-cols-1 items-start gap-x-4 gap-y-3 sm:grid-cols-2">
+        <div className="min-w-0 space-y-3">
+          <WorkField name={`${line}.service`} />
+        </div>
+        <WhatGoesOut line={line} lots={lots} />
         <SelectField
           name={`${line}.becomesLeatherId`}
           label="Becomes"
           placeholder="Choose a leather"
           choices={leathers.map(({ id, name }) => ({ value: id, label: name }))}
         />
+        <div className="flex flex-wrap gap-x-4 gap-y-3 sm:col-span-2">
+          <MoneyField
+            name={`${line}.unitPrice`}
+            label="Price"
+            per="ft²"
+            short
+            optional
+            whenEmpty="null"
+          />
+          <MoneyField
+            name={`${line}.fixedPrice`}
+            label="Or for the lot"
+            short
+            optional
+            whenEmpty="null"
+          />
+        </div>
       </div>
-      <MoneyField name={`${line}.unitPrice`} label="Price" per="ft²" optional whenEmpty="null" />
-      <MoneyField name={`${line}.fixedPrice`} label="Or for the lot" optional whenEmpty="null" />
-      <button
-        type="button"
-        onClick={onRemove}
-        aria-label={`Remove line ${at + 1}`}
-        className="mt-7 grid size-10 place-items-center rounded text-ink-soft hover:bg-manila"
-      >
-        <X size={18} aria-hidden="true" />
-      </button>
     </div>
+  );
+}
+
+/** The lot and how much of it. */
+function WhatGoesOut({ line, lots }: { line: string; lots: readonly FreeLot[] }) {
+  const workshop = useWorkshop();
+  const lotId: unknown = useWatch({ name: `${line}.lotId` });
+  const lot = lots.find(({ id }) => String(id) === String(lotId));
+  useSameLeather(line, lot);
+  const free = (each: FreeLot) => rackAreaText(each.freeAreaMm2, workshop);
+  return (
+    <>
+      <SelectField
+        name={`${line}.lotId`}
+        label="Lot that goes out"
+        placeholder="Choose a lot"
+        choices={lots.map((each) => ({
+          value: each.id,
+          label: `${each.tag}, ${each.leatherName}, ${free(each)} free`,
+        }))}
+      />
+      <AreaField
+        name={`${line}.areaMm2`}
+        label="Area"
+        optional
+        whenEmpty="null"
+        help={`Left empty, all that is free${lot === undefined ? '' : `: ${free(lot)}`}.`}
+      />
+    </>
   );
 }
 
