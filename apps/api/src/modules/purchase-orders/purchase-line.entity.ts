@@ -51,6 +51,6 @@ export class PurchaseLine {
   fromLotId: number | null = null;
 
   /** What a service costs for the lot, where it is not paid per ft². */
-  @Property({ type: MoneyType, columnType: 'integer', nullable: true })
+  @Property({ type: MoneyType, nullable: true })
   fixedPrice: Decimal | null = null;
 }

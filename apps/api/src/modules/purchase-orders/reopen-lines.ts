@@ -52,12 +52,18 @@ function requireSent({ number, state }: PurchaseOrder): void {
   }
 }
 
-const isShort = ({ received, quantity, closed }: PurchaseLine, { state }: PurchaseOrder): boolean =>
-  received < quantity && (closed || state === 'received');
+/** Leather whose work was called off is back on its lot, and goes out again with another order. */
+const isShort = (line: PurchaseLine, { state }: PurchaseOrder): boolean =>
+  line.service === null && line.received < line.quantity && (line.closed || state === 'received');
 
 function notClosed({ number }: PurchaseOrder, line: PurchaseLine | undefined) {
   if (line === undefined) return wrongState(`Nothing of ${number} was closed short.`);
   const where = `line ${line.position} of ${number}`;
+  if (line.service !== null) {
+    return wrongState(
+      `What ${where} sends out is not missing. Where its work was called off, the leather is back on its lot: draft another order for it.`,
+    );
+  }
   return line.received < line.quantity
     ? wrongState(`The rest of ${where} is awaited already.`)
     : wrongState(`All of ${where} is here.`);

@@ -47,7 +47,7 @@ export class ReceiptLine {
   carriage!: Decimal;
 
   /** Of leather that was out for a service: its share of what that had cost when it went. */
-  @Property({ type: MoneyType, columnType: 'integer' })
+  @Property({ type: MoneyType })
   material: Decimal = new Decimal(0);
 
   /** The row of the ledger that put it on the rack. */
