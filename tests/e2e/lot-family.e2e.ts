@@ -127,6 +127,18 @@ test('a maker is warned of shades, puts an offcut back, and reads the chain', as
   expect(await page.locator('main').innerText()).not.toMatch(/cost|@/i);
   await expectAccessible(page);
   await expectNoOverflow(page);
+  await page.getByRole('link', { name: 'In the ledger' }).click();
+  const only = page.getByText(`Only lot ${tag}`);
+  await only.waitFor();
+  await page.getByLabel('What', { exact: true }).selectOption('return');
+  await page.getByRole('button', { name: 'Show', exact: true }).click();
+  await page.waitForURL(/lot=\d+.*kind=return/);
+  await only.waitFor();
+  await expectAccessible(page);
+  await expectNoOverflow(page);
+  await page.getByRole('link', { name: `Show everything, not only lot ${tag}` }).click();
+  await page.waitForURL(/ledger\?kind=return$/);
+  await only.waitFor({ state: 'detached' });
   await context.close();
   // The browser itself says that an offcut larger than what was taken is refused.
   expect(complaints.filter((said) => !/status of 422/.test(said))).toEqual([]);

@@ -173,6 +173,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
   },
   { name: 'lot', list: '/lots', page: (id) => `/stockroom/lots/${id}`, roles: ['owner', 'maker'] },
   {
+    name: 'ledger-of-job',
+    list: '/jobs',
+    page: (id) => `/stockroom/ledger?job=${id}`,
+    roles: ['owner'],
+  },
+  {
     name: 'hardware-one',
     list: '/hardware',
     page: (id) => `/stockroom/hardware/${id}`,

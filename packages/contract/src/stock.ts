@@ -52,6 +52,7 @@ const movementFilters = {
   leatherId: idQuery,
   jobId: idQuery,
   orderId: idQuery,
+  purchaseOrderId: idQuery,
   kind: z.enum(movementKinds).optional(),
   /** Who moved it, by a part of the name. */
   person: z.string().trim().max(80).optional(),

@@ -55,6 +55,8 @@ describe('freight and duty', () => {
     expect(body.lots[0]).toMatchObject({ cost: '215.87', valueOnHand: '215.87' });
     expect(body.hardware[0]).toMatchObject({ valueOnHand: '171.96' });
     expect(await ledger(`lotId=${lot.lotId}`)).toMatchObject([{ value: '215.87' }]);
+    expect(await ledger(`purchaseOrderId=${order.id}`)).toHaveLength(2);
+    expect(await ledger(`purchaseOrderId=${order.id + 1}`)).toEqual([]);
   });
 
   it('are borne by the leather alone where they are shared by area', async () => {

@@ -16,6 +16,7 @@ interface Asked {
 export interface AskedMovements extends Asked {
   leatherId?: number | undefined;
   orderId?: number | undefined;
+  purchaseOrderId?: number | undefined;
   kind?: StockMovement['kind'] | undefined;
   person?: string | undefined;
   from?: string | undefined;
@@ -73,6 +74,7 @@ export async function readMovements(
     ...conditionsOf(asked),
     ...when(asked.leatherId, 'lot.leather_id = ?'),
     ...when(asked.orderId, 'job.order_id = ?'),
+    ...when(asked.purchaseOrderId, 'm.purchase_order_id = ?'),
     ...when(asked.kind, 'm.kind = ?'),
     ...when(asked.person, 'm.actor_name LIKE ?', (person) => [`%${person}%`]),
     ...when(asked.from, 'm.day >= ?'),

@@ -40,6 +40,9 @@ export function Component() {
             <TextLink to={`/counter/quotes/${order.quoteId}`}>{order.quoteNumber}</TextLink>, made
             from {order.patternName}.
           </p>
+          <p className="mt-2">
+            <TextLink to={`/stockroom/ledger?order=${id}`}>What the stockroom gave for it</TextLink>
+          </p>
         </Card>
       </div>
     </div>

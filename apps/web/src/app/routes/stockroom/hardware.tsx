@@ -6,6 +6,7 @@ import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { ChangeHardwareForm } from '../../../features/hardware/components/change-hardware-form.tsx';
 import { HardwareFacts } from '../../../features/hardware/components/hardware-facts.tsx';
 import {
@@ -76,7 +77,10 @@ export function Component() {
           />
         )}
         {!isKit && (
-          <Card title="Movements">
+          <Card
+            title="Movements"
+            aside={<TextLink to={`/stockroom/ledger?hardware=${id}`}>In the ledger</TextLink>}
+          >
             <MovementsTable item={item} />
           </Card>
         )}

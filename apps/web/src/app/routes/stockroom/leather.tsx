@@ -7,6 +7,7 @@ import { KeyFigures } from '../../../components/key-figures.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { ChangeLeatherForm } from '../../../features/leathers/components/change-leather-form.tsx';
 import { leatherDetail } from '../../../features/leathers/leather-words.ts';
 import { leatherQuery } from '../../../features/leathers/leathers.queries.ts';
@@ -67,7 +68,10 @@ export function Component() {
         <Card title="How much">
           <Facts leather={leather} />
         </Card>
-        <Card title="Lots on the rack">
+        <Card
+          title="Lots on the rack"
+          aside={<TextLink to={`/stockroom/ledger?leather=${id}`}>What moved of it</TextLink>}
+        >
           <LotsTable
             rows={lots?.pages.flatMap((page) => page.items) ?? []}
             empty={

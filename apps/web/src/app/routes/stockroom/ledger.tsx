@@ -1,5 +1,5 @@
 import { movementKinds, readMovementsFile } from '@hidewright/contract';
-import { useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
+import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import {
@@ -7,10 +7,12 @@ import {
   type LedgerChoice,
 } from '../../../features/stock/components/ledger-filter.tsx';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
+import { OnlyOf, type LedgerSubject } from '../../../features/stock/components/only-of.tsx';
 import { movementsQuery } from '../../../features/stock/stock.queries.ts';
 import { addressOf } from '../../../lib/api.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
+import { askedSubject, readSubject } from './ledger-subject.ts';
 import { StockroomNav } from './stockroom-nav.tsx';
 
 const wanted = (search: URLSearchParams): LedgerChoice => ({
@@ -20,32 +22,45 @@ const wanted = (search: URLSearchParams): LedgerChoice => ({
   to: search.get('to') ?? undefined,
 });
 
+const named = (choice: LedgerChoice) =>
+  Object.entries(choice).filter((entry): entry is [string, string] => entry[1] !== undefined);
+
 export async function loader({ request }: LoaderFunctionArgs) {
   const { searchParams } = new URL(request.url);
-  await queryClient.ensureInfiniteQueryData(movementsQuery(wanted(searchParams)));
-  return null;
+  const asked = { ...wanted(searchParams), ...askedSubject(searchParams).asked };
+  const [subject] = await Promise.all([
+    readSubject(searchParams),
+    queryClient.ensureInfiniteQueryData(movementsQuery(asked)),
+  ]);
+  return subject;
 }
 
 export function Component() {
+  const subject = useLoaderData<LedgerSubject | null>();
   const [search, setSearch] = useSearchParams();
   const { today } = useWorkshop();
   const chosen = wanted(search);
-  const named = (choice: LedgerChoice) =>
-    Object.entries(choice).filter((entry): entry is [string, string] => entry[1] !== undefined);
+  const { asked, kept } = askedSubject(search);
   return (
     <>
       <PageHeader title="Ledger" subtitle="Everything that moved, newest first" />
       <StockroomNav />
+      {subject !== null && (
+        <OnlyOf
+          subject={subject}
+          without={`/stockroom/ledger?${new URLSearchParams(named(chosen))}`}
+        />
+      )}
       <LedgerFilter
         key={search.toString()}
         chosen={chosen}
         today={today}
-        onChoose={(choice) => setSearch(named(choice))}
+        onChoose={(choice) => setSearch([...kept, ...named(choice)])}
       />
       <MovementsTable
-        item={chosen}
+        item={{ ...chosen, ...asked }}
         mixed
-        sheetAddress={addressOf(readMovementsFile, { query: chosen })}
+        sheetAddress={addressOf(readMovementsFile, { query: { ...chosen, ...asked } })}
       />
     </>
   );

@@ -5,6 +5,7 @@ import { Card } from '../../../components/card.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { Ticket } from '../../../components/ticket.tsx';
 import { ChangeLotForm } from '../../../features/lots/components/change-lot-form.tsx';
 import { patternsQuery } from '../../../features/patterns/patterns.queries.ts';
@@ -74,7 +75,10 @@ export function Component() {
           </>
         )}
         <FamilyCard lotId={id} handlesStock={handlesStock} />
-        <Card title="Movements">
+        <Card
+          title="Movements"
+          aside={<TextLink to={`/stockroom/ledger?lot=${id}`}>In the ledger</TextLink>}
+        >
           <MovementsTable item={item} />
         </Card>
         {handlesStock && (

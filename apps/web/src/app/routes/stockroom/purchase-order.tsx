@@ -4,6 +4,7 @@ import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { ClaimsCard } from '../../../features/purchase-orders/components/claims-card.tsx';
 import { OrderActions } from '../../../features/purchase-orders/components/order-actions.tsx';
 import { PurchaseLinesTable } from '../../../features/purchase-orders/components/purchase-lines-table.tsx';
@@ -45,7 +46,14 @@ export function Component() {
           />
         }
       />
-      <Card title="What is ordered">
+      <Card
+        title="What is ordered"
+        aside={
+          order.receipts > 0 && (
+            <TextLink to={`/stockroom/ledger?purchase=${id}`}>What moved for it</TextLink>
+          )
+        }
+      >
         <PurchaseLinesTable order={order} isOwner={isOwner} />
       </Card>
       {order.note !== '' && (

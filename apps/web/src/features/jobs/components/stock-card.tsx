@@ -4,6 +4,7 @@ import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { Notice } from '../../../components/notice.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { say } from '../../../components/toast.ts';
 import { ApiProblem } from '../../../lib/api-problem.ts';
 import { countText, rackAreaText, sizeText } from '../../../lib/formatting.ts';
@@ -37,6 +38,11 @@ export function StockCard({ job, canTake }: StockCardProps) {
     <Card
       title="Leather and hardware"
       subtitle={`${rackAreaText(job.neededAreaMm2, workshop)} of ${job.leatherName} needed`}
+      aside={
+        <TextLink to={`/stockroom/ledger?job=${job.id}`} className="print:hidden">
+          What moved for it
+        </TextLink>
+      }
     >
       {error !== null && (
         <Notice tone="danger" live className="mb-4">
