@@ -1,8 +1,18 @@
+import { rm, writeFile } from 'node:fs/promises';
+import path from 'node:path';
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { browser, closeBrowser, phone, still, watch } from '../support/browser.ts';
+import {
+  browser,
+  browserWithCamera,
+  closeBrowser,
+  phone,
+  still,
+  watch,
+} from '../support/browser.ts';
+import { filmOfCode } from '../support/fake-camera.ts';
 import { keyboardAlone } from '../support/hands.ts';
-import type { Hidewright } from '../support/hidewright.ts';
+import { temporaryFolder, type Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
 import { settled, signInAs } from '../support/steps.ts';
 import { expectAccessible, expectNoOverflow, idIn, visit } from '../support/walk.ts';
@@ -106,4 +116,28 @@ test('a maker counts bins blind on a phone, and the owner approves', async () =>
   const expected = /ERR_INTERNET_DISCONNECTED|status of 404/;
   expect(complaints.filter((said) => !expected.test(said))).toEqual([]);
   await context.close();
+});
+
+test('a maker holds a tag before the camera, and the lot opens', async () => {
+  const context = await (await browser()).newContext({ ...still, viewport: phone });
+  await signInAs(await context.newPage(), hidewright.url, 'maker');
+  const signedIn = await context.storageState();
+  const read = await context.request.get(`${hidewright.url}/api/lots?onRack=yes&limit=1`);
+  const { items } = (await read.json()) as { items: [{ id: number; tag: string }] };
+  const [lot] = items;
+  await context.close();
+
+  const folder = await temporaryFolder();
+  const film = path.join(folder, 'tag.y4m');
+  await writeFile(film, filmOfCode(`${hidewright.url}/t/${lot.tag}`));
+  const seeing = await browserWithCamera(film);
+  const page = await seeing.newPage({ ...still, viewport: phone, storageState: signedIn });
+  const complaints = watch(page);
+  await page.goto(`${hidewright.url}/stockroom/scan`);
+  await page.getByRole('button', { name: 'Use the camera' }).click();
+  await page.waitForURL(`**/stockroom/lots/${lot.id}`);
+  await page.getByText(lot.tag, { exact: true }).first().waitFor();
+  expect(complaints).toEqual([]);
+  await seeing.close();
+  await rm(folder, { recursive: true, force: true });
 });

@@ -30,14 +30,23 @@ export async function closeBrowser(): Promise<void> {
   running = undefined;
 }
 
-function launch(): Promise<Browser> {
+/** A browser of its own whose camera sees a film; whoever asks for it closes it. */
+export function browserWithCamera(film: string): Promise<Browser> {
+  return launch([
+    '--use-fake-device-for-media-stream',
+    '--use-fake-ui-for-media-stream',
+    `--use-file-for-fake-video-capture=${film}`,
+  ]);
+}
+
+function launch(more: readonly string[] = []): Promise<Browser> {
   const executablePath = [process.env['CHROMIUM'], ...usual].find(
     (file) => file && existsSync(file),
   );
   if (executablePath === undefined) {
     throw new Error('Chromium is not installed. On Debian: apt-get install chromium');
   }
-  return chromium.launch({ executablePath, args: flags, headless: true });
+  return chromium.launch({ executablePath, args: [...flags, ...more], headless: true });
 }
 
 /** Whatever a page complains of: errors in its console, thrown ones, and breaches of its security policy. */
