@@ -67,8 +67,10 @@ walk(
     await page.getByRole('row', { name: /Weekend bag/ }).waitFor();
     await page.setViewportSize(phone);
     await expectAccessible(page);
+    // Another tab has none of this one's drafts.
+    await page.evaluate(() => sessionStorage.clear());
     await page.reload();
-    await page.getByRole('button', { name: 'Work it out' }).waitFor();
+    await page.getByText(/^as you worked it out last; kept for you on this device/).waitFor();
     await expect
       .poll(() => piece.getByRole('textbox', { name: /^Work/ }).inputValue())
       .toBe('Weekend bag');

@@ -1,8 +1,13 @@
-import type { KindOfWorkTyped, WeekStart, WeekTyped } from '@hidewright/contract';
-import { dropDraft, readDraft, writeDraft } from '../../lib/draft.ts';
+import {
+  workOutWeekMix,
+  type KindOfWorkTyped,
+  type WeekStart,
+  type WeekTyped,
+} from '@hidewright/contract';
+import { dropDraft } from '../../lib/draft.ts';
+import { dropKept, readKept, writeKept } from '../../lib/kept.ts';
 
 export const draftKey = 'week-mix';
-const sentKey = 'week-mix-sent';
 
 export const blankKind = (kind: KindOfWorkTyped['kind'], deskMinutes = ''): KindOfWorkTyped => ({
   name: '',
@@ -14,16 +19,22 @@ export const blankKind = (kind: KindOfWorkTyped['kind'], deskMinutes = ''): Kind
   leastPerWeek: '0',
 });
 
-/** The week as it was last worked out in this tab, or else what the shop's own runs say. */
-export function weekToType({ week }: WeekStart): WeekTyped {
-  const sent = readDraft(sentKey) as WeekTyped | undefined;
-  if (sent !== undefined) return sent;
+/** The week that a person worked out last on this device; what an earlier release kept may be of no use any more. */
+export function keptWeek(person: string): WeekTyped | undefined {
+  return workOutWeekMix.body?.safeParse(readKept(person, draftKey)).data;
+}
+
+/** The week as it was last worked out, or else what the shop's own runs say. */
+export function weekToType({ week }: WeekStart, person: string): WeekTyped {
+  const kept = keptWeek(person);
+  if (kept !== undefined) return kept;
   return week.kinds.length > 0 ? week : { ...week, kinds: [blankKind('run')] };
 }
 
-export const keepWeek = (week: WeekTyped): void => writeDraft(sentKey, week);
+export const keepWeek = (person: string, week: WeekTyped): void =>
+  writeKept(person, draftKey, week);
 
-export function forgetWeek(): void {
+export function forgetWeek(person: string): void {
   dropDraft(draftKey);
-  dropDraft(sentKey);
+  dropKept(person, draftKey);
 }

@@ -12,8 +12,8 @@ export function weekStartQuery() {
 }
 
 /** The mix of the week that the page opens with, so that there is something to look at before anything is typed. */
-export function firstMixQuery(start: WeekStart) {
-  const week = weekToType(start);
+export function firstMixQuery(start: WeekStart, person: string) {
+  const week = weekToType(start, person);
   return queryOptions({
     queryKey: ['week-mixes', 'first', week],
     queryFn: () => call(workOutWeekMix, { body: week }),

@@ -10,17 +10,19 @@ import { KindFields } from './kind-fields.tsx';
 
 interface WeekFormProps {
   start: WeekStart;
+  /** Whose last week it begins with. */
+  person: string;
   onMix: (mix: WeekMixReply) => void;
   onStartAfresh: () => void;
 }
 
 /** The hours there are, what the shop needs, and each kind of work that the week can hold. */
-export function WeekForm({ start, onMix, onStartAfresh }: WeekFormProps) {
+export function WeekForm({ start, person, onMix, onStartAfresh }: WeekFormProps) {
   const send = useWorkOutWeekMix();
   return (
     <Form
       schema={workOutWeekMix.body}
-      defaults={weekToType(start)}
+      defaults={weekToType(start, person)}
       submitWord="Work it out"
       draftKey={draftKey}
       actions={
@@ -30,7 +32,7 @@ export function WeekForm({ start, onMix, onStartAfresh }: WeekFormProps) {
       }
       onSend={async (body) => {
         onMix(await send.mutateAsync({ body }));
-        keepWeek(body);
+        keepWeek(person, body);
       }}
     >
       <DecimalField
