@@ -23,7 +23,7 @@ export function LineProgress(props: LineProgressProps) {
   if (!isNothing(short))
     return (
       <span className="block md:text-left">
-        <strong className="text-brass">{`${goodsText(short, workshop)} short`}</strong>
+        <strong className="block text-brass">{`${goodsText(short, workshop)} short`}</strong>
         {onReopen && (
           <LineButton onClick={onReopen} word="Await the rest" of={` of ${line.name}`} />
         )}
@@ -60,7 +60,7 @@ export function LineProgress(props: LineProgressProps) {
 /** Its name ends in the line it is for, which the eye sees beside it. */
 function LineButton({ onClick, word, of }: { onClick: () => void; word: string; of: string }) {
   return (
-    <Button tone="quiet" className="-mr-3.5 block md:mr-0 md:-ml-3.5" onClick={onClick}>
+    <Button tone="quiet" className="-mr-3.5 md:mr-0 md:-ml-3.5" onClick={onClick}>
       {word}
       <span className="sr-only">{of}</span>
     </Button>
