@@ -65,7 +65,7 @@ walk('the owner sees why, changes a quantity, drafts it and sends the order', as
   await settled(page);
   await page.getByText('150').first().waitFor();
   await page.getByRole('button', { name: 'Send', exact: true }).click();
-  const dialog = page.getByRole('dialog');
+  const dialog = page.getByRole('dialog', { name: /^Send P-/ });
   await dialog.getByRole('button', { name: 'Send it' }).click();
   await dialog.waitFor({ state: 'detached' });
   await visit(page, `${hidewright.url}/stockroom/to-order`);
