@@ -203,6 +203,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner', 'maker'],
   },
   {
+    name: 'purchase-order-of-work',
+    list: '/lots?onRack=yes',
+    page: (id) => `/stockroom/purchase-orders/new?lot=${id}`,
+    roles: ['owner'],
+  },
+  {
     name: 'receive-order',
     list: '/purchase-orders?awaited=yes',
     page: (id) => `/stockroom/receive?order=${id}`,

@@ -60,6 +60,9 @@ export const stockLevels = z
     leatherAreaMm2: z.string(),
     leatherValue: confidential(z.string()),
     hardwareValue: confidential(z.string()),
+    /** The shop's own leather that was out to be worked on: beside what was on hand, not in it. */
+    outAreaMm2: z.string(),
+    outValue: confidential(z.string()),
     value: confidential(z.string()),
   })
   .meta({ id: 'StockLevels' });

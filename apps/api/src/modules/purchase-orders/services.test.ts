@@ -224,6 +224,29 @@ describe('what comes back', () => {
   });
 });
 
+describe('the value of stock', () => {
+  it('has what is out beside it until it is back, on whichever day one asks', async () => {
+    const levels = async (on: string) =>
+      (await owner().get('/api/stock-levels').query({ on, leatherId: ready.leatherId })).body;
+    const before = await levels('2026-12-01');
+    const order = await sent(dyeing({ areaMm2: ft2(20) }));
+    // Nobody is idle for twelve hours, which would end the session.
+    shop.clock.set(new Date('2026-12-01T20:00:00.000Z'));
+    await shop.as('maker').get('/api/session').expect(200);
+    await owner().get('/api/session').expect(200);
+    shop.clock.set(new Date('2026-12-02T06:00:00.000Z'));
+    await receive(order, { lots: [back(order, 19)] }).expect(201);
+    const beyond = (later: { outValue: string; leatherValue: string }) => [
+      Number(later.outValue) - Number(before.outValue),
+      Math.round(100 * (Number(later.leatherValue) - Number(before.leatherValue))) / 100,
+    ];
+    expect(beyond(await levels('2026-12-01'))).toEqual([180, -180]);
+    expect(beyond(await levels('2026-12-02'))).toEqual([0, -180]);
+    const maker = await shop.as('maker').get('/api/stock-levels').expect(200);
+    expect(maker.text).not.toMatch(/"outValue":/);
+  });
+});
+
 describe('what cannot be', () => {
   it('is said beside its field in a draft', async () => {
     const refuse = async (line: object, field: string, message: RegExp) => {

@@ -3,6 +3,7 @@ import type { HardwareLevel, LeatherLevel, StockLevels } from '@hidewright/contr
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
+import { readOutAt } from './out-at.ts';
 import { readStandings, type Standings } from './read-standings.ts';
 
 interface Asked {
@@ -38,6 +39,7 @@ export async function readLevels(em: EntityManager, asked: Asked): Promise<Stock
   const standings = asked.isToday ? await readStandings(em) : undefined;
   const lots = asked.hardwareId === undefined ? await readLotRows(em, asked) : [];
   const pieces = asked.leatherId === undefined ? await readHardwareRows(em, asked) : [];
+  const out = asked.hardwareId === undefined ? await readOutAt(em, asked) : nothing;
   const [leatherValue, hardwareValue] = [sumOf(lots, 'value'), sumOf(pieces, 'value')];
   return {
     on: asked.on,
@@ -53,9 +55,13 @@ export async function readLevels(em: EntityManager, asked: Asked): Promise<Stock
     leatherAreaMm2: area(sumOf(lots, 'quantity')),
     leatherValue: money(leatherValue),
     hardwareValue: money(hardwareValue),
+    outAreaMm2: area(out.quantity),
+    outValue: money(out.value),
     value: money(leatherValue + hardwareValue),
   };
 }
+
+const nothing = { quantity: 0, value: 0 };
 
 const money = (hundredths: number): string => moneyText(unscaled(hundredths, 2));
 const area = (thousandths: number): string => unscaled(thousandths, 3).toFixed();

@@ -1,4 +1,4 @@
-import { readStockLevelsFile } from '@hidewright/contract';
+import { readStockLevelsFile, type StockLevels } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useId } from 'react';
 import { useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
@@ -87,6 +87,7 @@ export function Component() {
               ...worth,
             ]}
           />
+          {levels.outAreaMm2 !== '0' && <OutBeside levels={levels} />}
         </Card>
         <Card title="Leather">
           <LeatherLevels levels={levels} />
@@ -96,6 +97,18 @@ export function Component() {
         </Card>
       </div>
     </>
+  );
+}
+
+/** The shop's own still, and on no rack. */
+function OutBeside({ levels: { outAreaMm2, outValue } }: { levels: StockLevels }) {
+  const workshop = useWorkshop();
+  const worth =
+    outValue === undefined ? '' : `, ${workshop.currency} ${moneyText(outValue)} at cost`;
+  return (
+    <p className="mt-4 text-ink-soft">
+      {`Beside it ${rackAreaText(outAreaMm2, workshop)} of leather is out to be worked on${worth}.`}
+    </p>
   );
 }
 
