@@ -8,6 +8,6 @@ export function lotsOf({ lines }: PurchaseOrder): string {
 
 /** Where leather is that a line has worked on, once it is not awaited. */
 export function whereItIs({ service }: PurchaseLine): string | undefined {
-  if (service?.state === 'came back') return 'back';
+  if (service?.state === 'came back') return 'came back';
   return service?.state === 'put back' ? `back on ${service.lotTag}, not done` : undefined;
 }

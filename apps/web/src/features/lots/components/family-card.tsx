@@ -25,7 +25,13 @@ export function FamilyCard({ lotId, handlesStock }: FamilyCardProps) {
       <ul aria-label="Cut from one another" className="space-y-1">
         {lots.map((lot) => (
           <li key={lot.lotId} style={{ paddingLeft: `${depthOf(lots, lot.lotId) * 1.25}rem` }}>
-            <Member lot={lot} isThis={lot.lotId === lotId} />
+            <Member
+              lot={lot}
+              isThis={lot.lotId === lotId}
+              wasWorkedOn={lots.some(
+                (each) => each.parentId === lot.lotId && each.service !== null,
+              )}
+            />
             {lot.parentId === null && (
               <p className="text-sm text-ink-soft">
                 <CameIn origin={origin} mayOpenOrders={handlesStock} />
@@ -50,7 +56,14 @@ export function FamilyCard({ lotId, handlesStock }: FamilyCardProps) {
   );
 }
 
-function Member({ lot, isThis }: { lot: FamilyMember; isThis: boolean }) {
+interface MemberProps {
+  lot: FamilyMember;
+  isThis: boolean;
+  /** Some of it came back from a service as a lot of its own. */
+  wasWorkedOn: boolean;
+}
+
+function Member({ lot, isThis, wasWorkedOn }: MemberProps) {
   const { areaUnit } = useWorkshop();
   const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
   const after = lot.service === null ? '' : `after ${lot.service}`;
@@ -65,7 +78,7 @@ function Member({ lot, isThis }: { lot: FamilyMember; isThis: boolean }) {
         )}{' '}
         <span className="text-ink-soft">{isThis ? `this lot, ${words}` : words}</span>
       </span>
-      <span className="text-sm">{leftOf(lot, area)}</span>
+      <span className="text-sm">{wasWorkedOn ? afterWork(lot, area) : leftOf(lot, area)}</span>
     </div>
   );
 }
@@ -81,6 +94,12 @@ function leftOf(
   if (onHandAreaMm2 === measuredAreaMm2) return `${area(measuredAreaMm2)}, all there`;
   return `${area(measuredAreaMm2)}, ${area(onHandAreaMm2)} left`;
 }
+
+/** Nothing of it was used up: it hangs below as what it has become. */
+const afterWork = (lot: FamilyMember, area: (areaMm2: string) => string): string =>
+  lot.onHandAreaMm2 === '0' && lot.outAreaMm2 === '0'
+    ? `${area(lot.measuredAreaMm2)}, nothing left`
+    : leftOf(lot, area);
 
 interface UseProps {
   use: WentInto;

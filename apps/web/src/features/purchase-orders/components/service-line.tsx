@@ -86,7 +86,7 @@ function WhatGoesOut({ line, lots }: { line: string; lots: readonly FreeLot[] })
         placeholder="Choose a lot"
         choices={lots.map((each) => ({
           value: each.id,
-          label: `${each.tag}, ${each.leatherName}, ${free(each)} free`,
+          label: `${each.tag}, ${free(each)} free, ${each.leatherName}`,
         }))}
       />
       <AreaField
