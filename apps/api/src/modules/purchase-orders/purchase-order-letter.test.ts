@@ -3,8 +3,10 @@ import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { purchaseOrderLetter } from './purchase-order-letter.ts';
 
 const shop = {
-  ...{ name: 'Marlpit Leather', address: 'The Old Maltings' },
-  ...{ currency: 'USD', areaUnit: 'ft2' },
+  name: 'Marlpit Leather',
+  address: 'The Old Maltings',
+  currency: 'USD',
+  areaUnit: 'ft2',
 } as const;
 
 const dyeing = {
