@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, expect } from 'vitest';
 import { closeBrowser, phone } from '../support/browser.ts';
+import { daysFromNow, saidFromNow } from '../support/days.ts';
 import { keyboardAlone } from '../support/hands.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
@@ -35,18 +36,18 @@ walk(
       .waitFor();
 
     await page.getByLabel('How many').fill('400');
-    await page.getByLabel('Packed by').fill('2026-12-10');
+    await page.getByLabel('Packed by').fill(daysFromNow(9));
     await page.getByRole('button', { name: 'So many of a pattern' }).click();
     await page.getByLabel('Pattern of run 2').selectOption({ label: 'Luggage tag with neck' });
     await page.getByLabel('How many').nth(1).fill('600');
-    await page.getByLabel('Packed by').nth(1).fill('2026-12-21');
+    await page.getByLabel('Packed by').nth(1).fill(daysFromNow(20));
     await page.getByRole('button', { name: 'Can we make them?' }).click();
     await page.getByRole('heading', { name: '2. Luggage tag with neck' }).waitFor();
     await page.getByRole('heading', { name: 'What is short' }).waitFor();
 
     const rivets = page.getByRole('region', { name: 'Rivets 7 mm, antique brass' }).first();
     await rivets.getByText('Fennbridge Fittings').waitFor();
-    await rivets.getByText('Fri 4 Dec').first().waitFor();
+    await rivets.getByText(saidFromNow(3)).first().waitFor();
     await rivets.getByText('Day by day').click();
     await rivets.getByRole('table').waitFor();
     await page
@@ -67,7 +68,7 @@ walk('the owner drafts what is short with one press, and not twice', async ({ pa
   await page.getByLabel('Pattern of run 1').selectOption({ label: 'Luggage tag with neck' });
   await page.getByLabel('Option').waitFor();
   await page.getByLabel('How many').fill('900');
-  await page.getByLabel('Packed by').fill('2026-12-21');
+  await page.getByLabel('Packed by').fill(daysFromNow(20));
   await page.getByRole('button', { name: 'Can we make them?' }).click();
   await page.getByRole('heading', { name: 'What is short' }).waitFor();
   await expectAccessible(page);

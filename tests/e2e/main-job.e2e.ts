@@ -2,6 +2,7 @@ import { afterAll, afterEach, beforeEach, expect } from 'vitest';
 import type { Page } from 'playwright-core';
 import { browser, closeBrowser, phone, still, watch, wide } from '../support/browser.ts';
 import { keyboardAlone, mouse, type Hands } from '../support/hands.ts';
+import { daysFromNow } from '../support/days.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
 import { mailThat } from '../support/mailbox.ts';
@@ -217,11 +218,4 @@ async function bookkeeperLocks(invoiceNumber: string): Promise<void> {
   await page.getByText('Locked.').first().waitFor();
   await expectAccessible(page);
   await leave(page);
-}
-
-/** A working day so many days from now, as a day field takes it. */
-function daysFromNow(days: number): string {
-  const day = new Date(Date.now() + days * 86_400_000);
-  if (days > 0) while (day.getUTCDay() % 6 === 0) day.setUTCDate(day.getUTCDate() + 1);
-  return day.toISOString().slice(0, 10);
 }
