@@ -11,7 +11,12 @@ import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
 import { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
-import { priceHardware, priceLot, withCarriage, type PricedLine } from './receive/price-delivery.ts';
+import {
+  priceHardware,
+  priceLot,
+  withCarriage,
+  type PricedLine,
+} from './receive/price-delivery.ts';
 import { withServices } from './receive/price-services.ts';
 import { putOnRack } from './receive/put-on-rack.ts';
 import { putLotsBack } from './services/put-lots-back.ts';

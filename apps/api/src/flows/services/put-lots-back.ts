@@ -12,7 +12,11 @@ import type { Work } from '../../work.ts';
  * What came back already stays as it came.
  * @param lineId only this line, where one is named
  */
-export async function putLotsBack(work: Work, order: PurchaseOrder, lineId?: number): Promise<void> {
+export async function putLotsBack(
+  work: Work,
+  order: PurchaseOrder,
+  lineId?: number,
+): Promise<void> {
   const lines = await work.em.find(PurchaseLine, {
     ...(lineId !== undefined && { id: lineId }),
     purchaseOrderId: order.id,
