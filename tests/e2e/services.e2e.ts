@@ -78,7 +78,7 @@ test('a lot goes out to be split, and comes back as grain and flesh', async () =
     .first()
     .waitFor();
   await page.getByRole('link', { name }).click();
-  await page.getByText(/out for splitting/).waitFor();
+  await page.getByText(/ft² out for splitting/).waitFor();
   await page.getByText(/at Fenside Dye Works, P-\d+, awaited/).waitFor();
   await expectAccessible(page);
 
