@@ -71,7 +71,7 @@ const input: RunInput = {
   breaks: quantities.map((quantity) => ({ quantity, typedPrice: null })),
   options: basis.options.map((option) => ({ ...option, typedExtra: null })),
 };
-const turns = 60;
+const turns = 120;
 for (let turn = 0; turn < 20; turn += 1) priceRun(input);
 const before = process.cpuUsage();
 for (let turn = 0; turn < turns; turn += 1) priceRun(input);
@@ -92,7 +92,7 @@ for (let turn = 0; turn < turns; turn += 1) {
 await hidewright.stop();
 await rm(dataDir, { recursive: true });
 
-const warm = times.slice(5).sort((a, b) => a - b);
+const warm = times.slice(20).sort((a, b) => a - b);
 const p95 = warm[Math.floor(warm.length * 0.95)] ?? 0;
 const figure = (name: string, value: number, goal: number | null, unit = 'ms') =>
   report({ bench: 'quote', figure: name, value, unit, goal });

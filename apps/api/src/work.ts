@@ -28,9 +28,10 @@ export async function inTransaction<T>(
   actor: Actor,
   useCase: (work: Work) => Promise<T>,
 ): Promise<T> {
-  return context.orm.em
-    .fork()
-    .transactional(async (em) => useCase(await workOn(context, em, actor)));
+  return context.orm.em.fork().transactional(async (em) => {
+    const workshop = await em.findOne(Workshop, 1);
+    return useCase(workOn(context, em, actor, workshop?.timeZone));
+  });
 }
 
 /** A use case that only reads, on its own identity map. */
@@ -39,11 +40,20 @@ export async function reading<T>(
   actor: Actor,
   useCase: (work: Work) => Promise<T>,
 ): Promise<T> {
-  return useCase(await workOn(context, context.orm.em.fork(), actor));
+  const em = context.orm.em.fork();
+  // Most that only reads has no use for the rest of the shop's values.
+  const [shop] = await em.execute<{ zone: string }[]>(
+    'SELECT time_zone AS zone FROM workshop WHERE id = 1',
+  );
+  return useCase(workOn(context, em, actor, shop?.zone));
 }
 
-async function workOn(context: Context, em: EntityManager, actor: Actor): Promise<Work> {
-  const now = context.clock.now();
-  const workshop = await em.findOne(Workshop, 1);
-  return { em, actor, now, today: dayIn(workshop?.timeZone ?? 'UTC', now) };
+function workOn(
+  { clock }: Context,
+  em: EntityManager,
+  actor: Actor,
+  timeZone: string | undefined,
+): Work {
+  const now = clock.now();
+  return { em, actor, now, today: dayIn(timeZone ?? 'UTC', now) };
 }

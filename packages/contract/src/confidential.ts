@@ -19,43 +19,68 @@ export function withoutConfidential(
   value: unknown,
   role: Role | undefined,
 ): unknown {
-  if (role !== undefined && hiddenFrom.get(schema)?.includes(role)) return undefined;
-  if (value === null || value === undefined) return value;
-  if (schema instanceof z.ZodObject && typeof value === 'object') {
-    return visibleFields(schema, value as Record<string, unknown>, role);
-  }
-  if (schema instanceof z.ZodArray && Array.isArray(value)) {
-    return value.map((item) => withoutConfidential(schema.element as z.ZodType, item, role));
+  return sieveFor(schema, role)(value);
+}
+
+type Sieve = (value: unknown) => unknown;
+
+/** A schema is read once for each role: a list runs through the same one for every row. */
+const sieves = new Map<Role | undefined, WeakMap<z.ZodType, Sieve>>();
+
+function sieveFor(schema: z.ZodType, role: Role | undefined): Sieve {
+  const known = sieves.get(role) ?? new WeakMap<z.ZodType, Sieve>();
+  sieves.set(role, known);
+  const sieve = known.get(schema) ?? makeSieve(schema, role);
+  known.set(schema, sieve);
+  return sieve;
+}
+
+const whole: Sieve = (value) => value;
+const nothing: Sieve = () => undefined;
+
+function makeSieve(schema: z.ZodType, role: Role | undefined): Sieve {
+  if (role !== undefined && hiddenFrom.get(schema)?.includes(role)) return nothing;
+  if (schema instanceof z.ZodObject) return fieldsOf(schema, role);
+  if (schema instanceof z.ZodArray) {
+    const inner = sieveFor(schema.element as z.ZodType, role);
+    return (value) => (Array.isArray(value) ? value.map(inner) : value);
   }
   if (schema instanceof z.ZodUnion)
-    return withoutConfidential(branchFor(schema, value), value, role);
-  if (schema instanceof z.ZodRecord && typeof value === 'object') {
-    const inner = schema.valueType as z.ZodType;
-    return Object.fromEntries(
-      Object.entries(value).map(([key, item]) => [key, withoutConfidential(inner, item, role)]),
-    );
+    return (value) => (isNothing(value) ? value : sieveFor(branchFor(schema, value), role)(value));
+  if (schema instanceof z.ZodRecord) {
+    const inner = sieveFor(schema.valueType as z.ZodType, role);
+    return (value) =>
+      isObject(value)
+        ? Object.fromEntries(Object.entries(value).map(([key, item]) => [key, inner(item)]))
+        : value;
   }
   if (
     schema instanceof z.ZodOptional ||
     schema instanceof z.ZodNullable ||
     schema instanceof z.ZodDefault
   ) {
-    return withoutConfidential(schema.unwrap() as z.ZodType, value, role);
+    return sieveFor(schema.unwrap() as z.ZodType, role);
   }
-  return value;
+  return whole;
 }
 
-function visibleFields(
-  schema: z.ZodObject,
-  value: Record<string, unknown>,
-  role: Role | undefined,
-) {
-  const visible: Record<string, unknown> = {};
-  for (const [name, field] of Object.entries(schema.shape)) {
-    const shown = withoutConfidential(field as z.ZodType, value[name], role);
-    if (shown !== undefined) visible[name] = shown;
-  }
-  return visible;
+const isNothing = (value: unknown): boolean => value === null || value === undefined;
+const isObject = (value: unknown): value is Record<string, unknown> =>
+  typeof value === 'object' && value !== null;
+
+function fieldsOf(schema: z.ZodObject, role: Role | undefined): Sieve {
+  const fields = Object.entries(schema.shape).map(
+    ([name, field]) => [name, sieveFor(field as z.ZodType, role)] as const,
+  );
+  return (value) => {
+    if (!isObject(value)) return value;
+    const visible: Record<string, unknown> = {};
+    for (const [name, sieve] of fields) {
+      const shown = sieve(value[name]);
+      if (shown !== undefined) visible[name] = shown;
+    }
+    return visible;
+  };
 }
 
 /** A value that fits no branch is a fault of ours, and must not slip through unfiltered. */

@@ -27,6 +27,7 @@ import * as people from './people.ts';
 import * as periods from './periods.ts';
 import * as plateOffers from './plate-offers.ts';
 import * as presses from './presses.ts';
+import * as purchaseLines from './purchase-lines.ts';
 import * as purchaseOrders from './purchase-orders.ts';
 import * as quotes from './quotes.ts';
 import * as scans from './scans.ts';
@@ -86,6 +87,7 @@ const rooms: Record<string, unknown>[] = [
   hardware,
   suppliers,
   supplierOffers,
+  purchaseLines,
   purchaseOrders,
   receipts,
   supplierClaims,

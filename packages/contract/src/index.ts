@@ -34,6 +34,7 @@ export * from './periods.ts';
 export * from './plate-offers.ts';
 export * from './presses.ts';
 export * from './problem.ts';
+export * from './purchase-lines.ts';
 export * from './purchase-orders.ts';
 export * from './quote-body.ts';
 export * from './quotes.ts';

@@ -36,9 +36,13 @@ export abstract class ScaledDecimal extends Type<Decimal | null, number | null> 
   }
 }
 
+/** 1, 10, 100, … and 1, 0.1, 0.01, …: every amount that is read or written needs one. */
+const powers = Array.from({ length: 10 }, (_, places) => new Decimal(`1e${places}`));
+const parts = Array.from({ length: 10 }, (_, places) => new Decimal(`1e-${places}`));
+
 /** @throws {RangeError} when a value has more decimals than its column keeps: rounding is done by name, earlier */
 export function scaled(value: Decimal, places: number): number {
-  const whole = value.times(Decimal.pow(10, places));
+  const whole = value.times(powers[places] as Decimal);
   if (!whole.isInteger() || whole.abs().greaterThan(Number.MAX_SAFE_INTEGER)) {
     throw new RangeError(`${value.toString()} does not fit a column of ${places} decimals`);
   }
@@ -46,5 +50,5 @@ export function scaled(value: Decimal, places: number): number {
 }
 
 export function unscaled(whole: number, places: number): Decimal {
-  return new Decimal(whole).dividedBy(Decimal.pow(10, places));
+  return new Decimal(whole).times(parts[places] as Decimal);
 }
