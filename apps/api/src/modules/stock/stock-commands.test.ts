@@ -10,7 +10,7 @@ import {
 } from '../../testing/stock-invariants.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 
-const sequences = process.env['DRILL_SIZE'] === 'full' ? 1000 : 40;
+const sequences = process.env['DRILL_SIZE'] === 'full' ? 1000 : 150;
 
 let ready: BenchShop;
 let supplierId: number;
