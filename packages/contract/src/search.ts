@@ -3,7 +3,17 @@ import { endpoint } from './endpoint.ts';
 
 export const found = z
   .object({
-    kind: z.enum(['quote', 'order', 'job', 'invoice', 'customer', 'pattern', 'lot', 'hardware']),
+    kind: z.enum([
+      'quote',
+      'order',
+      'job',
+      'invoice',
+      'customer',
+      'pattern',
+      'lot',
+      'hardware',
+      'purchase order',
+    ]),
     label: z.string(),
     detail: z.string(),
     /** Where it is shown. */

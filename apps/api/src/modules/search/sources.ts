@@ -75,6 +75,14 @@ const sources: Source[] = [
       WHERE h.name LIKE ? ESCAPE '\\' OR h.kind LIKE ? ESCAPE '\\' ORDER BY h.name LIMIT 5`,
     to: (key) => `/stockroom/hardware/${key}`,
   },
+  {
+    kind: 'purchase order',
+    roles: everybody,
+    sql: `SELECT p.id AS key, p.number AS label, s.name || ' · ' || p.state AS detail
+      FROM purchase_order p JOIN supplier s ON s.id = p.supplier_id
+      WHERE p.number LIKE ? ESCAPE '\\' OR s.name LIKE ? ESCAPE '\\' ORDER BY p.id DESC LIMIT 5`,
+    to: (key) => `/stockroom/purchase-orders/${key}`,
+  },
 ];
 
 /** What a role may find: nothing that it could not open. */
