@@ -36,6 +36,7 @@ export async function openJobs(em: EntityManager): Promise<OpenJob[]> {
     FROM job j JOIN customer_order o ON o.id = j.order_id
     WHERE j.state <> 'finished' AND o.state <> 'cancelled' ORDER BY j.id`,
   );
+  if (rows.length === 0) return [];
   const steps = await em.find(
     JobStep,
     { jobId: { $in: rows.map(({ id }) => id) } },

@@ -1,8 +1,7 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import { pricesInKit, type RunHardware } from '@hidewright/domain';
 import { priceText } from '../http/decimal-text.ts';
-import { Hardware } from '../modules/hardware/hardware.entity.ts';
-import { kitsAmong } from '../modules/hardware/kits.ts';
+import { unscaled } from '../db/columns/scaled-decimal.ts';
 import type { Work } from '../work.ts';
 
 /** A kind of hardware as a run counts it: of a kit its parts, each at its price in that kit. */
@@ -25,26 +24,53 @@ export async function hardwareKinds(
       swaps.flatMap(({ byHardwareId }) => (byHardwareId === null ? [] : [byHardwareId])),
     ),
   ]);
-  const kits = await kitsAmong(em, ids);
-  const partIds = [...kits.values()].flat().map(({ hardwareId }) => hardwareId);
-  const all = await em.find(Hardware, { id: { $in: [...ids, ...partIds] } });
-  const byId = new Map(all.map((each) => [each.id, each]));
+  const rows = await pricedRows(em, ids);
+  const plain = (row: PricedRow) => ({
+    name: row.name,
+    unitPrice: priceText(unscaled(row.unit_price, 4)),
+  });
+  const byId = new Map(rows.map((row) => [row.id, row]));
   return new Map(
-    all.map((each) => {
-      const parts = (kits.get(each.id) ?? []).flatMap(({ hardwareId, quantity }) => {
-        const part = byId.get(hardwareId);
-        return part === undefined ? [] : [{ ...plain(part), hardwareId, quantity }];
+    rows.map((row) => {
+      const parts = (JSON.parse(row.parts) as [number, number][]).flatMap(([id, quantity]) => {
+        const part = byId.get(id);
+        return part === undefined ? [] : [{ ...plain(part), hardwareId: id, quantity }];
       });
-      return [each.id, { ...plain(each), parts: pricedIn(each, parts) }];
+      return [row.id, { ...plain(row), parts: pricedIn(row, plain(row).unitPrice, parts) }];
     }),
   );
 }
 
-const plain = ({ name, unitPrice }: Hardware) => ({ name, unitPrice: priceText(unitPrice) });
+interface PricedRow {
+  id: number;
+  name: string;
+  unit_price: number;
+  price_from_parts: number;
+  /** [hardware, how many] of a kit, as JSON */
+  parts: string;
+}
 
-function pricedIn(kit: Hardware, parts: Kind['parts']): Kind['parts'] {
-  if (kit.priceFromParts || parts.length === 0) return parts;
-  const prices = pricesInKit(priceText(kit.unitPrice), parts);
+/** These kinds of hardware and, of each kit among them, its parts: in plain SQL, since every price asks for them. */
+function pricedRows(em: Work['em'], ids: readonly number[]): Promise<PricedRow[]> {
+  return em.execute<PricedRow[]>(
+    `WITH named (id) AS (SELECT DISTINCT value FROM json_each(?))
+    SELECT h.id, h.name, h.unit_price, h.price_from_parts,
+      (SELECT json_group_array(json_array(k.hardware_id, k.quantity) ORDER BY k.id) FROM kit_part k
+        WHERE k.kit_id = h.id AND h.id IN (SELECT id FROM named)) AS parts
+    FROM hardware h
+    WHERE h.id IN (SELECT id FROM named
+      UNION SELECT hardware_id FROM kit_part WHERE kit_id IN (SELECT id FROM named))`,
+    [JSON.stringify(ids)],
+  );
+}
+
+function pricedIn(
+  { price_from_parts }: PricedRow,
+  unitPrice: string,
+  parts: Kind['parts'],
+): Kind['parts'] {
+  if (price_from_parts === 1 || parts.length === 0) return parts;
+  const prices = pricesInKit(unitPrice, parts);
   return parts.map((part, at) => ({ ...part, unitPrice: prices[at] ?? part.unitPrice }));
 }
 

@@ -2,7 +2,6 @@ import { priceRun, type BreakNumbers, type RunInput, type RunNumbers } from '@hi
 import type { QuoteBody } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
 import { invalid } from '../http/problem.ts';
-import { Customer } from '../modules/customers/customer.entity.ts';
 import { definitionFor } from '../modules/designs/read-designs.ts';
 import { keepLayoutId } from '../modules/layouts/stored-layouts.ts';
 import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
@@ -76,8 +75,9 @@ const rungRow = (quoteId: number, rung: BreakNumbers, typed: string | null) => (
   total: new Decimal(rung.total),
 });
 
-async function requireCustomer(work: Work, id: number): Promise<void> {
-  if ((await work.em.findOne(Customer, id)) !== null) return;
+async function requireCustomer({ em }: Work, id: number): Promise<void> {
+  const there = await em.execute('SELECT id FROM customer WHERE id = ?', [id]);
+  if (there.length > 0) return;
   throw invalid([
     { field: 'customerId', message: 'Choose a customer from the list, or add a new one.' },
   ]);

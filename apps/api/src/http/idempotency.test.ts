@@ -37,6 +37,14 @@ describe('[S35][I10] the same key', () => {
     expect(await namesOf('At once')).toEqual(['At once']);
   });
 
+  it('gives back every character of the reply', async () => {
+    const name = `It's "new"\\? 5 % — ☕ :name ? ; \u2028 --`;
+    const first = await add('key-odd', leather(name)).expect(201);
+    const second = await add('key-odd', leather(name)).expect(201);
+    expect(second.body).toEqual(first.body);
+    expect(second.body.name).toBe(name);
+  });
+
   it('is refused with other words', async () => {
     await add('key-two', leather('One')).expect(201);
     const { body } = await add('key-two', leather('Another')).expect(422);

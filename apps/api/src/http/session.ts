@@ -20,6 +20,8 @@ declare global {
   }
 }
 
+type DoneReading = (error: unknown, person: Express.User | false) => void;
+
 /** Checks the e-mail address and password that a request brings. */
 export type Authenticate = (request: Request) => Promise<Express.User | undefined>;
 
@@ -81,15 +83,9 @@ function passportFor(context: Context): passport.Authenticator {
   authenticator.serializeUser((person, done) => {
     done(null, person.id);
   });
-  authenticator.deserializeUser((id: number, done) => {
-    findActive(context, id).then(
-      (person) => {
-        done(null, person ?? false);
-      },
-      (error: unknown) => {
-        done(error);
-      },
-    );
+  authenticator.deserializeUser((request: Request, id: number, done: DoneReading) => {
+    const { person } = request.session;
+    done(null, person?.id === id ? person : false);
   });
   return authenticator as passport.Authenticator;
 }
@@ -104,13 +100,4 @@ async function findByPassword(
     .findOne(Person, { email: email.trim().toLowerCase(), active: true });
   const matches = await checkPassword(person?.passwordHash, password);
   return person !== null && matches ? person : undefined;
-}
-
-/** Every request asks for them: in plain SQL, which is quicker than an entity. */
-async function findActive(context: Context, id: number): Promise<Express.User | undefined> {
-  const [person] = await context.orm.em.execute<Express.User[]>(
-    'SELECT id, name, email, role FROM person WHERE id = ? AND active = 1',
-    [id],
-  );
-  return person;
 }

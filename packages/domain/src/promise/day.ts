@@ -13,9 +13,15 @@ const shape = /^(\d{4})-(\d{2})-(\d{2})$/;
 export function dayNumber(day: Day, field = 'day'): number {
   const [, year, month, date] = (shape.exec(day) ?? []).map(Number);
   if (year === undefined || month === undefined || date === undefined) throw notADay(field);
-  const number = countDays(year, month, date);
-  if (month < 1 || month > 12 || date < 1 || dayFromNumber(number) !== day) throw notADay(field);
-  return number;
+  const inCalendar = month >= 1 && month <= 12 && date >= 1 && date <= lengthOf(year, month);
+  if (!inCalendar) throw notADay(field);
+  return countDays(year, month, date);
+}
+
+/** Days of a month. */
+function lengthOf(year: number, month: number): number {
+  if (month === 2) return year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0) ? 29 : 28;
+  return [4, 6, 9, 11].includes(month) ? 30 : 31;
 }
 
 const notADay = (field: string): InvalidInput =>

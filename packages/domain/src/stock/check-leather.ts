@@ -4,7 +4,6 @@ import type { LeatherNeed, LeatherStock, RackLot } from './check-stock.ts';
 import { chooseLots, type LotOffer, shadesOf } from './choose-lots.ts';
 import {
   areaForPieces,
-  type LotToCut,
   panelArea,
   type PiecesOfLot,
   piecesFromLot,
@@ -39,7 +38,6 @@ export interface LeatherFacts {
 
 interface Offered {
   lot: RackLot;
-  cut: LotToCut;
   from: PiecesOfLot;
 }
 
@@ -51,10 +49,10 @@ export function drawLeather(
 ): { facts: LeatherFacts; left: LeatherStock } {
   const panel = panelArea(need.cut);
   const offered = leather.lots.map((lot): Offered => {
-    const cut = { ...lot, laid: need.laid.get(lot.lotId) ?? null };
-    return { lot, cut, from: piecesFromLot(cut, need.cut, panel) };
+    const laid = need.laid.get(lot.lotId) ?? null;
+    return { lot, from: piecesFromLot(lot, need.cut, laid, panel) };
   });
-  const offers = offered.map(({ lot, from }): LotOffer => ({ ...lot, pieces: from.pieces }));
+  const offers = offered.map(toOffer);
   const fromLots = Math.min(when.pieces, notOwed(leather, need));
   const chosen = chooseLots(offers, fromLots, need.likeShade);
   const takes = chosen.flatMap(({ lotId, pieces }) => {
@@ -76,6 +74,13 @@ export function drawLeather(
   return { facts, left: leftOf(leather, takes, rest) };
 }
 
+const toOffer = ({ lot: { lotId, shade, receivedOn }, from: { pieces } }: Offered): LotOffer => ({
+  lotId,
+  shade,
+  receivedOn,
+  pieces,
+});
+
 /** Pieces that may be cut now without taking what jobs taken on before still need. */
 function notOwed({ lots, owed }: LeatherStock, { cut }: LeatherNeed): number {
   if (owed === 0) return Infinity;
@@ -83,14 +88,14 @@ function notOwed({ lots, owed }: LeatherStock, { cut }: LeatherNeed): number {
   return Math.max(0, panels) * cut.pieces;
 }
 
-function takeFrom({ lot, cut, from }: Offered, pieces: number): LotTaken {
+function takeFrom({ lot, from }: Offered, pieces: number): LotTaken {
   const units = Math.ceil(pieces / from.perUnit);
   return {
     lot,
     pieces,
     by: from.by,
     units,
-    area: areaForPieces(cut, from, pieces),
+    area: areaForPieces(lot, from, pieces),
     unitsLeft: Math.floor(from.pieces / from.perUnit) - units,
   };
 }
@@ -116,7 +121,7 @@ function drawRest(
 }
 
 const areaOfOffers = (offered: readonly Offered[]): number =>
-  offered.reduce((sum, { cut, from }) => sum + areaForPieces(cut, from, from.pieces), 0);
+  offered.reduce((sum, { lot, from }) => sum + areaForPieces(lot, from, from.pieces), 0);
 
 function withLots(rest: Standing, takes: readonly LotTaken[], onRack: number): Standing {
   const taken = takes.reduce((sum, { area }) => sum + area, 0);

@@ -42,7 +42,7 @@ export interface ItemStock {
   buying: Sourcing;
 }
 
-export interface RackLot extends Omit<LotToCut, 'laid'> {
+export interface RackLot extends LotToCut {
   lotId: number;
   tag: string;
   place: string;

@@ -4,7 +4,6 @@ import { chooseLots, shadesOf, type LotOffer } from './choose-lots.ts';
 
 const lot = (lotId: number, pieces: number, receivedOn: string, shade = ''): LotOffer => ({
   lotId,
-  tag: `L-${lotId}`,
   pieces,
   receivedOn,
   shade,

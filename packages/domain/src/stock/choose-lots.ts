@@ -1,7 +1,6 @@
 /** A lot on the rack, and how many pieces of a pattern it still gives. */
 export interface LotOffer {
   lotId: number;
-  tag: string;
   /** as it was noted; '' where nobody noted it */
   shade: string;
   /** 'YYYY-MM-DD' */

@@ -18,7 +18,6 @@ const side: LotToCut = {
   usablePercent: 85,
   panel: null,
   drawnArea: null,
-  laid: null,
 };
 
 describe('piecesFromLot', () => {
@@ -34,10 +33,10 @@ describe('piecesFromLot', () => {
   });
 
   it('trusts a layout on the side as drawn, in proportion to what is free', () => {
-    expect(piecesFromLot({ ...side, laid: 150 }, cut)).toMatchObject({ pieces: 150, by: 'layout' });
-    const half = { ...side, laid: 151, freeArea: mm2(1_000_000) };
-    expect(piecesFromLot(half, cut).pieces).toBe(75);
-    expect(piecesFromLot({ ...side, laid: 0 }, cut).pieces).toBe(0);
+    expect(piecesFromLot(side, cut, 150)).toMatchObject({ pieces: 150, by: 'layout' });
+    const half = { ...side, freeArea: mm2(1_000_000) };
+    expect(piecesFromLot(half, cut, 151).pieces).toBe(75);
+    expect(piecesFromLot(side, cut, 0).pieces).toBe(0);
   });
 
   it('leaves out flaws where the side is drawn and not laid out', () => {
@@ -56,9 +55,9 @@ describe('piecesFromLot', () => {
   it('keeps to whole numbers where a share would not end', () => {
     const odd = { ...side, measuredArea: 9_007_199_254_740_991, freeArea: 9_007_199_254_740_991 };
     expect(usableArea({ ...odd, usablePercent: 33.3333 })).toBe(3_002_396_749_180_578);
-    const laid = { ...odd, laid: 3 };
-    expect(areaForPieces(laid, piecesFromLot(laid, cut), 1)).toBe(3_002_399_751_580_331);
-    expect(areaForPieces(laid, piecesFromLot(laid, cut), 3)).toBe(laid.freeArea);
+    const laid = piecesFromLot(odd, cut, 3);
+    expect(areaForPieces(odd, laid, 1)).toBe(3_002_399_751_580_331);
+    expect(areaForPieces(odd, laid, 3)).toBe(odd.freeArea);
   });
 
   it('gives as many pieces taken in two goes as in one, and never takes more than is free', () => {
@@ -69,18 +68,13 @@ describe('piecesFromLot', () => {
     });
     fc.assert(
       fc.property(lots, fc.nat(300), ({ share, usable, laid }, first) => {
-        const lot = {
-          ...side,
-          freeArea: mm2(share * 20_000),
-          usablePercent: usable,
-          laid,
-        };
-        const all = piecesFromLot(lot, cut);
+        const lot = { ...side, freeArea: mm2(share * 20_000), usablePercent: usable };
+        const all = piecesFromLot(lot, cut, laid);
         const taken = Math.min(all.pieces, Math.ceil(first / all.perUnit) * all.perUnit);
         const area = areaForPieces(lot, all, taken);
         expect(area).toBeLessThanOrEqual(lot.freeArea);
         const left = { ...lot, freeArea: lot.freeArea - area };
-        const rest = piecesFromLot(left, cut).pieces;
+        const rest = piecesFromLot(left, cut, laid).pieces;
         expect(taken + rest).toBeLessThanOrEqual(all.pieces);
         expect(taken + rest).toBeGreaterThanOrEqual(all.pieces - 1);
       }),

@@ -24,8 +24,6 @@ export interface LotToCut {
   panel: { widthMm: number; heightMm: number } | null;
   /** area inside its drawn edge less its flaws; null where it is not drawn */
   drawnArea: number | null;
-  /** pieces that a layout on it as drawn gives, of the whole lot; null where none is laid out */
-  laid: number | null;
 }
 
 export interface PiecesOfLot {
@@ -46,10 +44,16 @@ export const panelArea = (cut: Pick<CutFrom, 'areaMm2'>): number =>
  * How many pieces of a pattern a lot still gives. Laid out as drawn, its layout's count, in proportion to what is
  * free of it; of ready panels, whole ones; otherwise as many of the pattern's panels as the usable share holds
  * beside what is gone already. All by area, but for the layout: a share of waste stays with the lot.
+ * @param laid pieces that a layout on it as drawn gives, of the whole lot; null where none is laid out
  * @param panel the area of the pattern's panel: `panelArea(cut)`
  */
-export function piecesFromLot(lot: LotToCut, cut: CutFrom, panel = panelArea(cut)): PiecesOfLot {
-  if (lot.laid !== null) return byLayout(lot, lot.laid);
+export function piecesFromLot(
+  lot: LotToCut,
+  cut: CutFrom,
+  laid: number | null = null,
+  panel = panelArea(cut),
+): PiecesOfLot {
+  if (laid !== null) return byLayout(lot, laid);
   const perPanel = lot.panel === null ? 0 : panelsWithin(lot.panel, cut);
   return lot.panel !== null && perPanel > 0
     ? byPanels(lot, lot.panel, perPanel * cut.pieces)
@@ -88,7 +92,7 @@ function byArea(lot: LotToCut, perUnit: number, area: number): PiecesOfLot {
 }
 
 /** What can still be cut of a lot, where no layout says it: its usable share less what is gone. */
-export function usableArea(lot: Omit<LotToCut, 'laid'>): number {
+export function usableArea(lot: LotToCut): number {
   const { freeArea, measuredArea, usablePercent, drawnArea } = lot;
   const share = divided(measuredArea, Math.round(usablePercent * 10_000), 1_000_000, 'down');
   const usable = Math.min(share, drawnArea ?? share);
@@ -96,7 +100,7 @@ export function usableArea(lot: Omit<LotToCut, 'laid'>): number {
 }
 
 /** What can still be cut of some lots together. */
-export const usableOf = (lots: readonly Omit<LotToCut, 'laid'>[]): number =>
+export const usableOf = (lots: readonly LotToCut[]): number =>
   lots.reduce((sum, lot) => sum + usableArea(lot), 0);
 
 /** `area × part / whole` of whole numbers of 0 or more, rounded; the product may be beyond exact numbers. */

@@ -6,6 +6,7 @@ import { finishedOf, finishedWords } from './finished-for-check.ts';
 import { freeLotRows } from './leather-for-check.ts';
 import { loadShopStock } from './load-shop-stock.ts';
 import { needsOf, toolsOf, toToolStock } from './needs-of-runs.ts';
+import type { OwedToJobs } from './owed-to-jobs.ts';
 import { pressForCheck } from './press-for-check.ts';
 import type { PlannedRun } from './runs-asked.ts';
 
@@ -19,6 +20,7 @@ export interface CheckedRun {
 
 export interface CheckedRuns {
   shop: ShopStock;
+  owed: OwedToJobs;
   runs: CheckedRun[];
 }
 
@@ -32,7 +34,7 @@ export async function checkPlanned(
   const hardware = planned.flatMap(({ plan }) => plan.hardware);
   const hardwareIds = [...new Set(hardware.map(({ hardwareId }) => hardwareId))];
   const rows = await freeLotRows(em, leatherIds);
-  const stock = await loadShopStock(work, { leatherIds, hardwareIds }, rows);
+  const { stock, owed } = await loadShopStock(work, { leatherIds, hardwareIds }, rows);
   const tools = await inTurn(planned, (run) => toolsOf(em, run));
   const needs = await inTurn(planned, (run, at) =>
     needsOf(em, run, { rows, tools: tools[at] ?? { needs: [], tools: [] } }),
@@ -46,7 +48,7 @@ export async function checkPlanned(
     press: await pressForCheck(em, run, tools[at]?.tools ?? []),
     finished: finishedWords(there, run),
   }));
-  return { shop, runs };
+  return { shop, owed, runs };
 }
 
 const once = (tools: readonly Tool[]): Tool[] => [

@@ -1,10 +1,9 @@
 import { usableOf, type ItemStock, type LeatherStock, type ShopStock } from '@hidewright/domain';
-import { Hardware } from '../../modules/hardware/hardware.entity.ts';
-import { Leather } from '../../modules/leathers/leather.entity.ts';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { Work } from '../../work.ts';
 import { benchToday, openJobs } from '../bench-load.ts';
 import { readItemSources, type ItemSource } from '../order-suggestions/item-sources.ts';
-import { boughtHardware, boughtLeather } from './bought-rows.ts';
+import { boughtKinds, boughtLeathers, type BoughtLeather } from './bought-rows.ts';
 import { toRackLot, type LotRow } from './leather-for-check.ts';
 import { buyingFrom, readOnOrder, type OnOrder, type Wanted } from './on-order.ts';
 import { readOwedToJobs, type OwedToJobs } from './owed-to-jobs.ts';
@@ -15,17 +14,17 @@ export async function loadShopStock(
   work: Work,
   wanted: Wanted,
   lots: readonly LotRow[],
-): Promise<Omit<ShopStock, 'tools'>> {
+): Promise<{ stock: Omit<ShopStock, 'tools'>; owed: OwedToJobs }> {
   const { em, today } = work;
-  const leathers = await em.find(Leather, { id: { $in: [...wanted.leatherIds] } });
+  const leathers = await boughtLeathers(em, wanted.leatherIds);
   const standIns = await readStandIns(em, wanted.hardwareIds);
   const hardwareIds = [...new Set([...wanted.hardwareIds, ...standIns.partIds])];
-  const kinds = await em.find(Hardware, { id: { $in: hardwareIds } });
+  const kinds = await boughtKinds(em, hardwareIds);
   const sourceOf = await readItemSources(em, today, { ...wanted, hardwareIds });
   const onOrder = await readOnOrder(em, today, { ...wanted, hardwareIds });
   const owed = await readOwedToJobs(em);
   const free = await freeHardware(work, hardwareIds);
-  return {
+  const stock = {
     today,
     bench: await benchToday(work),
     held: await openJobs(em),
@@ -34,19 +33,22 @@ export async function loadShopStock(
         lots: lots.filter((row) => row.leather_id === leather.id).map(toRackLot),
         owed: owed.leather(leather.id),
         onOrder: onOrder({ leatherId: leather.id }),
-        source: sourceOf(boughtLeather(leather)),
+        source: sourceOf(leather),
       }),
     ),
     items: kinds.map((kind) => ({
       hardwareId: kind.id,
       name: kind.name,
       kind: kind.kind,
-      fromCustomer: kind.fromCustomer,
+      fromCustomer: kind.from_customer === 1,
       standIns: standIns.of(kind.id),
       ...poolOf(kind.id, free, owed, onOrder({ hardwareId: kind.id })),
-      buying: buyingFrom(sourceOf(boughtHardware(kind)), onOrder({ hardwareId: kind.id }), kind),
+      buying: buyingFrom(sourceOf(kind), onOrder({ hardwareId: kind.id }), {
+        fromCustomer: kind.from_customer === 1,
+      }),
     })),
   };
+  return { stock, owed };
 }
 
 function poolOf(
@@ -76,11 +78,12 @@ interface OfLeather {
 
 /** What other jobs still need comes from the rack first, and beyond that from what is on order. */
 function toLeatherStock(
-  leather: Leather,
+  leather: BoughtLeather,
   { lots, owed, onOrder, source }: OfLeather,
 ): LeatherStock {
   const usable = usableOf(lots);
-  const usableShare = leather.wholeUsablePercent.dividedBy(100);
+  const usablePercent = unscaled(leather.usable_percent, 4);
+  const usableShare = usablePercent.dividedBy(100);
   const cuttable = (thousandths: number) => usableShare.times(thousandths).floor().toNumber();
   let onRack = usable;
   const promised = owed.map((each) => {
@@ -99,10 +102,10 @@ function toLeatherStock(
       promised: promised.filter(({ quantity }) => quantity > 0),
     },
     whole:
-      leather.wholeForm === null || leather.wholeAreaMm2 === null
+      leather.whole_form === null || leather.whole_area === null
         ? null
-        : { form: leather.wholeForm, areaMm2: leather.wholeAreaMm2.toString() },
-    usablePercent: leather.wholeUsablePercent.toString(),
+        : { form: leather.whole_form, areaMm2: unscaled(leather.whole_area, 3).toString() },
+    usablePercent: usablePercent.toString(),
     buying: buyingFrom(source, { ...onOrder, drafted: cuttable(onOrder.drafted) }),
   };
 }

@@ -9,7 +9,7 @@ import { definitionOf } from '../../modules/patterns/pattern-versions.ts';
 import { numbersOfQuote } from '../../modules/quotes/quote-numbers.ts';
 import { Quote } from '../../modules/quotes/quote.entity.ts';
 import type { Work } from '../../work.ts';
-import { layPattern, type LaidPattern } from '../lay-pattern.ts';
+import { layPatterns, type LaidPattern } from '../lay-pattern.ts';
 import { hardwareKinds, type Kinds } from '../run-hardware.ts';
 import { runInputFor } from '../run-input.ts';
 import { planOf, planRun, type RunPlan } from '../run-plan.ts';
@@ -47,13 +47,18 @@ export async function layAskedPatterns(
   context: Pick<Context, 'orm' | 'workers'>,
   runs: readonly AskedRun[],
 ): Promise<(LaidPattern | null)[]> {
-  return Promise.all(
-    runs.map(async ({ patternId }, at) => {
-      if (patternId === null || patternId === undefined) return null;
-      const message = 'This pattern is not there. Choose one from the list.';
-      return layPattern(context, patternId, invalid([{ field: `runs.${at}.patternId`, message }]));
-    }),
+  const asked = runs.flatMap(({ patternId }, at) =>
+    patternId === null || patternId === undefined ? [] : [{ patternId, at }],
   );
+  const laid = await layPatterns(
+    context,
+    asked.map(({ patternId }) => patternId),
+    (at) => {
+      const message = 'This pattern is not there. Choose one from the list.';
+      return invalid([{ field: `runs.${asked[at]?.at}.patternId`, message }]);
+    },
+  );
+  return runs.map((_, at) => laid[asked.findIndex((each) => each.at === at)] ?? null);
 }
 
 /** @throws {Problem} 422 naming the run and what is wrong with it */

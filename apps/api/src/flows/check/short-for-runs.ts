@@ -15,11 +15,10 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { Work } from '../../work.ts';
 import type { CheckedRun, CheckedRuns } from './checked-runs.ts';
 import { lackingOf } from './lacking.ts';
-import { readOwedToJobs } from './owed-to-jobs.ts';
 
 /** Everything that is short for one of the runs, with how it goes on in the coming weeks. */
 export async function shortOf(work: Work, checked: CheckedRuns): Promise<RunsCheck['short']> {
-  const { shop, runs } = checked;
+  const { shop, owed, runs } = checked;
   const leathers = shop.leathers.flatMap((leather) => {
     const asked = runs.flatMap((run) =>
       run.facts.leather.leather.leatherId === leather.leatherId
@@ -37,7 +36,6 @@ export async function shortOf(work: Work, checked: CheckedRuns): Promise<RunsChe
     return isShort(asked) ? [{ item, asked }] : [];
   });
   if (leathers.length === 0 && items.length === 0) return [];
-  const owed = await readOwedToJobs(work.em);
   const onHand = await readOnHand(work.em, {
     leatherIds: leathers.map(({ leather }) => leather.leatherId),
     hardwareIds: items.map(({ item }) => item.hardwareId),

@@ -29,21 +29,32 @@ export function activityHash(row: Covered): string {
   return createHash('sha256').update(JSON.stringify(covered)).digest('hex');
 }
 
-/** Writes who did what, in the transaction that does it. */
-export async function logDeed(work: Work, deed: Deed): Promise<void> {
-  const last = await work.em.findOne(Activity, { seq: { $gt: 0 } }, { orderBy: { seq: 'desc' } });
+/**
+ * Writes who did what, in the transaction that does it; what that has changed so far is written with it. In plain SQL,
+ * since every change does this.
+ */
+export async function logDeed({ em, now, actor }: Work, deed: Deed): Promise<void> {
+  await em.flush();
+  const [last] = await em.execute<Pick<Activity, 'seq' | 'hash'>[]>(
+    'SELECT seq, hash FROM activity ORDER BY seq DESC LIMIT 1',
+  );
   const row = {
     seq: (last?.seq ?? 0) + 1,
-    at: work.now.toISOString(),
-    actorId: work.actor.id,
-    actorName: work.actor.name,
-    actorRole: work.actor.role,
+    at: now.toISOString(),
+    actorId: actor.id,
+    actorName: actor.name,
+    actorRole: actor.role,
     action: deed.action,
     subjectKind: deed.subjectKind,
     subjectId: deed.subjectId,
     detail: deed.detail ?? {},
     previousHash: last?.hash ?? '',
   };
-  work.em.create(Activity, { ...row, hash: activityHash(row) });
-  await work.em.flush();
+  const { detail, ...plain } = row;
+  await em.execute(
+    `INSERT INTO activity (seq, at, actor_id, actor_name, actor_role, action, subject_kind, subject_id, previous_hash,
+      detail, hash) VALUES (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`,
+    [...Object.values(plain), JSON.stringify(detail), activityHash(row)],
+    'run',
+  );
 }

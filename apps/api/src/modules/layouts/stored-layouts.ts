@@ -28,6 +28,9 @@ export interface Worked<Source, Laid> {
 }
 export type WorkedLayout = Worked<LayoutSource, Layout>;
 
+/** Who finds layouts, and works out those that are not known. */
+type Layer = Pick<Context, 'orm' | 'workers'>;
+
 /** Finds a layout by what goes into it. */
 export function layoutHash(asked: LayoutAsked): string {
   return hashOf(layoutSourceOf(asked));
@@ -37,25 +40,35 @@ export function layoutHash(asked: LayoutAsked): string {
  * The layout for a pattern's definition (or any request for one): found by the hash of its input, or else worked
  * out by a worker. Belongs into an endpoint's `prepare`, outside the transaction; `keepLayout` then stores it.
  */
-export async function layoutFor(
-  context: Pick<Context, 'orm' | 'workers'>,
-  asked: LayoutAsked,
-): Promise<WorkedLayout> {
-  const source = layoutSourceOf(asked);
-  return workedOnce(context, source, hashOf(source), async () =>
-    source.by === 'outline'
-      ? await context.workers.layOut(source.input)
-      : handCount(source.counted),
+export async function layoutFor(context: Layer, asked: LayoutAsked): Promise<WorkedLayout> {
+  const [worked] = await layoutsFor(context, [asked]);
+  return worked as WorkedLayout;
+}
+
+/** Those for several at once, in their order; what is asked for twice is found or worked out once. */
+export function layoutsFor(context: Layer, asked: readonly LayoutAsked[]): Promise<WorkedLayout[]> {
+  return workedOnce(
+    context,
+    asked.map((each) => {
+      const source = layoutSourceOf(each);
+      const workOut = async () =>
+        source.by === 'outline'
+          ? await context.workers.layOut(source.input)
+          : handCount(source.counted);
+      return { source, inputHash: hashOf(source), workOut };
+    }),
   );
 }
 
 /** The layout of a strip without an end, found or worked out in the same way. */
 export async function stripLayoutFor(
-  context: Pick<Context, 'orm' | 'workers'>,
+  context: Layer,
   input: LayoutInput,
 ): Promise<WorkedLayout> {
   const source = { by: 'outline' as const, input };
-  return workedOnce(context, source, hashOf(source), () => context.workers.layOut(input));
+  const workOut = () => context.workers.layOut(input);
+  const [worked] = await workedOnce(context, [{ source, inputHash: hashOf(source), workOut }]);
+  return worked as WorkedLayout;
 }
 
 /**
@@ -63,11 +76,13 @@ export async function stripLayoutFor(
  * @param workOut how, where it is not known: by a worker, unless said
  */
 export async function sideLayoutFor(
-  context: Pick<Context, 'orm' | 'workers'>,
+  context: Layer,
   input: SideInput,
   workOut: () => Promise<SideLayout> = () => context.workers.layOutSide(input),
 ): Promise<Worked<SideInput, SideLayout>> {
-  return workedOnce(context, input, sha256(layoutInputKey(input)), workOut);
+  const inputHash = sha256(layoutInputKey(input));
+  const [worked] = await workedOnce(context, [{ source: input, inputHash, workOut }]);
+  return worked as Worked<SideInput, SideLayout>;
 }
 
 /** Pieces of the layouts on drawn sides that are kept, by the key of what they were asked. */
@@ -84,19 +99,33 @@ export async function piecesBySideInput(
   return new Map(kept.map(({ inputHash, pieces }) => [keyOf.get(inputHash) ?? '', pieces]));
 }
 
+interface ToWork<Source, Laid> {
+  source: Source;
+  inputHash: string;
+  workOut: () => Promise<Laid>;
+}
+
 async function workedOnce<Source, Laid>(
   { orm }: Pick<Context, 'orm'>,
-  source: Source,
-  inputHash: string,
-  workOut: () => Promise<Laid>,
-): Promise<Worked<Source, Laid>> {
+  asked: readonly ToWork<Source, Laid>[],
+): Promise<Worked<Source, Laid>[]> {
   // What went in may be as long as the layout, and is at hand.
-  const [stored] = await orm.em.execute<{ result: string }[]>(
-    'SELECT result FROM layout WHERE input_hash = ?',
-    [inputHash],
+  const stored = await orm.em.execute<{ hash: string; result: string }[]>(
+    `SELECT input_hash AS hash, result FROM layout WHERE input_hash IN (SELECT value FROM json_each(?))`,
+    [JSON.stringify(asked.map(({ inputHash }) => inputHash))],
   );
-  const layout = stored === undefined ? await workOut() : (JSON.parse(stored.result) as Laid);
-  return { inputHash, source, layout };
+  const layouts = new Map<string, Laid | Promise<Laid>>(
+    stored.map(({ hash, result }) => [hash, JSON.parse(result) as Laid]),
+  );
+  for (const { inputHash, workOut } of asked)
+    if (!layouts.has(inputHash)) layouts.set(inputHash, workOut());
+  return Promise.all(
+    asked.map(async ({ source, inputHash }) => ({
+      source,
+      inputHash,
+      layout: (await layouts.get(inputHash)) as Laid,
+    })),
+  );
 }
 
 /** A layout of any kind, as far as keeping it goes. */
@@ -126,8 +155,10 @@ export async function keepLayoutId(
   work: Pick<Work, 'em' | 'now'>,
   worked: LayoutToKeep,
 ): Promise<number> {
-  const { inputHash } = worked;
-  const stored = await work.em.findOne(StoredLayout, { inputHash }, { fields: ['id'] });
+  const [stored] = await work.em.execute<{ id: number }[]>(
+    'SELECT id FROM layout WHERE input_hash = ?',
+    [worked.inputHash],
+  );
   return stored?.id ?? (await keepLayout(work, worked)).id;
 }
 

@@ -39,12 +39,3 @@ export async function revokeLinks(work: Work, quoteId: number): Promise<number> 
   await work.em.flush();
   return links.length;
 }
-
-/** The link of a quote that works longest. */
-export async function openLink(work: Work, quoteId: number): Promise<CustomerLink | null> {
-  return work.em.findOne(
-    CustomerLink,
-    { quoteId, revokedAt: null, expiresAt: { $gt: work.now.toISOString() } },
-    { orderBy: { expiresAt: 'desc' } },
-  );
-}

@@ -92,17 +92,4 @@ export async function markFailed(work: Work, id: number, why: string): Promise<v
   });
 }
 
-/** The subject's latest mail, which tells whether it has left. */
-export async function latestMail(
-  work: Work,
-  kind: NewMail['subjectKind'],
-  id: number,
-): Promise<OutgoingMail | null> {
-  return work.em.findOne(
-    OutgoingMail,
-    { subjectKind: kind, subjectId: id },
-    { orderBy: { id: 'desc' } },
-  );
-}
-
 const withoutToken = (body: string) => body.replaceAll(/\/c\/[A-Za-z0-9_-]+/g, '/c/…');

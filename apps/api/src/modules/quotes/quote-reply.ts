@@ -1,16 +1,10 @@
 import { quoteTerms, type Quote as QuoteReply } from '@hidewright/contract';
 import type { Layout, RunInput } from '@hidewright/domain';
+import { notFound } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
-import { Customer } from '../customers/customer.entity.ts';
-import { StoredLayout } from '../layouts/layout.entity.ts';
 import { pathOf } from '../layouts/stored-layouts.ts';
-import { openLink } from '../links/customer-links.ts';
-import { latestMail } from '../mail/outbox.ts';
-import { Order } from '../orders/order.entity.ts';
-import { Pattern } from '../patterns/pattern.entity.ts';
-import { PatternVersion } from '../patterns/pattern-version.entity.ts';
 import { whyNoMail } from './why-no-mail.ts';
-import { Quote } from './quote.entity.ts';
+import type { Quote } from './quote.entity.ts';
 import { numbersOfQuote } from './quote-numbers.ts';
 import { quotedOf } from './quoted.ts';
 
@@ -23,35 +17,28 @@ export async function quoteReply(
   quote: Quote,
   mailAvailable: boolean,
 ): Promise<QuoteReply> {
-  const customer = await work.em.findOneOrFail(Customer, quote.customerId);
-  const version = await work.em.findOneOrFail(PatternVersion, quote.patternVersionId);
-  const pattern = await work.em.findOneOrFail(Pattern, version.patternId);
-  // Read only: beside the entities that are, it would be compared with what it was at every flush.
-  const stored = await work.em.findOneOrFail(StoredLayout, quote.layoutId, {
-    disableIdentityMap: true,
-  });
-  const order = await work.em.findOne(Order, { quoteId: quote.id });
+  const about = await readAbout(work, quote.id);
   const { breaks } = quotedOf(quote);
   const input = quote.input as RunInput;
   return {
     ...ownFields(quote),
-    customerName: customer.name,
-    patternId: pattern.id,
-    patternName: pattern.name,
-    patternVersion: version.number,
-    orderId: order?.id ?? null,
-    orderNumber: order?.number ?? null,
-    layout: stored.result as Layout,
-    outlinePath: pathOf(stored),
+    customerName: about.customerName,
+    patternId: about.patternId,
+    patternName: about.patternName,
+    patternVersion: about.patternVersion,
+    orderId: about.orderId,
+    orderNumber: about.orderNumber,
+    layout: JSON.parse(about.layout) as Layout,
+    outlinePath: pathOf({ input: JSON.parse(about.laidOut) }),
     breaks,
     tooling: input.tooling,
     input,
     numbers: numbersOfQuote(quote),
-    customerEmail: customer.email,
-    cannotMail: whyNoMail(customer, mailAvailable),
-    letter: await letterOf(work, quote.id),
-    link: await linkOf(work, quote.id),
-    revisions: await otherRevisions(work, quote),
+    customerEmail: about.customerEmail,
+    cannotMail: whyNoMail({ name: about.customerName, email: about.customerEmail }, mailAvailable),
+    letter: about.letter === null ? null : (JSON.parse(about.letter) as QuoteReply['letter']),
+    link: about.linkExpiresAt === null ? null : { expiresAt: about.linkExpiresAt },
+    revisions: JSON.parse(about.revisions) as QuoteReply['revisions'],
   };
 }
 
@@ -79,23 +66,38 @@ function ownFields(quote: Quote) {
   };
 }
 
-async function letterOf(work: Work, quoteId: number): Promise<QuoteReply['letter']> {
-  const mail = await latestMail(work, 'quote', quoteId);
-  if (mail === null) return null;
-  const { state, recipient, sentAt, lastError } = mail;
-  return { state, recipient, sentAt, lastError };
+interface About {
+  customerName: string;
+  customerEmail: string;
+  patternId: number;
+  patternName: string;
+  patternVersion: number;
+  layout: string;
+  laidOut: string;
+  orderId: number | null;
+  orderNumber: string | null;
+  letter: string | null;
+  linkExpiresAt: string | null;
+  revisions: string;
 }
 
-async function linkOf(work: Work, quoteId: number): Promise<QuoteReply['link']> {
-  const link = await openLink(work, quoteId);
-  return link === null ? null : { expiresAt: link.expiresAt };
-}
-
-async function otherRevisions(work: Work, quote: Quote): Promise<QuoteReply['revisions']> {
-  const others = await work.em.find(
-    Quote,
-    { number: quote.number, id: { $ne: quote.id } },
-    { orderBy: { revision: 'desc' } },
+/** All around a quote in one statement: a screen shows it after every change. */
+async function readAbout({ em, now }: Work, quoteId: number): Promise<About> {
+  const [about] = await em.execute<About[]>(
+    `SELECT c.name AS customerName, c.email AS customerEmail, p.id AS patternId, p.name AS patternName,
+      v.number AS patternVersion, l.result AS layout, l.input AS laidOut, o.id AS orderId, o.number AS orderNumber,
+      (SELECT json_object('state', state, 'recipient', recipient, 'sentAt', sent_at, 'lastError', last_error)
+        FROM outgoing_mail WHERE subject_kind = 'quote' AND subject_id = q.id ORDER BY id DESC LIMIT 1) AS letter,
+      (SELECT MAX(expires_at) FROM customer_link
+        WHERE quote_id = q.id AND revoked_at IS NULL AND expires_at > ?) AS linkExpiresAt,
+      (SELECT json_group_array(json_object('id', id, 'revision', revision, 'state', state) ORDER BY revision DESC)
+        FROM quote WHERE number = q.number AND id <> q.id) AS revisions
+    FROM quote q JOIN customer c ON c.id = q.customer_id JOIN pattern_version v ON v.id = q.pattern_version_id
+      JOIN pattern p ON p.id = v.pattern_id JOIN layout l ON l.id = q.layout_id
+      LEFT JOIN customer_order o ON o.quote_id = q.id
+    WHERE q.id = ?`,
+    [now.toISOString(), quoteId],
   );
-  return others.map(({ id, revision, state }) => ({ id, revision, state }));
+  if (about === undefined) throw notFound('quote');
+  return about;
 }
