@@ -2,13 +2,13 @@ import { readFile } from 'node:fs/promises';
 import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { fileURLToPath } from 'node:url';
-import compression from 'compression';
 import express, { type Express, type RequestHandler, type Router } from 'express';
 import helmet from 'helmet';
-import { pinoHttp } from 'pino-http';
 import type { Context } from './context.ts';
+import { compressed } from './http/compressed.ts';
 import { errorHandler } from './http/error-handler.ts';
 import { notFound } from './http/problem.ts';
+import { requestLog } from './http/request-log.ts';
 import { sameOrigin } from './http/same-origin.ts';
 import { sessions } from './http/session.ts';
 import { activityRoutes } from './modules/activity/activity.routes.ts';
@@ -114,9 +114,9 @@ export async function createApp(context: Context): Promise<Express> {
   app.disable('x-powered-by');
   app.set('query parser', 'simple');
   app.set('etag', false);
-  app.use(pinoHttp({ logger: context.log, serializers: { req: withoutTokens, res: onlyStatus } }));
+  app.use(requestLog(context));
   app.use(helmet(headers(context)));
-  app.use(compression());
+  app.use(compressed());
   app.use(
     '/api',
     noStore,
@@ -158,16 +158,6 @@ function headers(context: Context): Parameters<typeof helmet>[0] {
     originAgentCluster: overTls,
     referrerPolicy: { policy: 'no-referrer' },
   };
-}
-
-function onlyStatus(response: { statusCode: number }) {
-  return { statusCode: response.statusCode };
-}
-
-/** A customer's token never reaches the log. */
-function withoutTokens(request: { id: unknown; method: string; url: string }) {
-  const url = request.url.replace(/\/(c|links)\/[^/?#]+/, '/$1/…');
-  return { id: request.id, method: request.method, url };
 }
 
 /** The built web application; every address that is no file is answered by its page. */
