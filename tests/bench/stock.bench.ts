@@ -59,11 +59,11 @@ await watched.kill();
 
 const middle = (times: number[]) => times.sort((a, b) => a - b)[times.length >> 1] ?? 0;
 
-/** The middle of up to 60 turns after the first third, which warms up; a slow one takes 5 s at most. */
+/** The middle of up to 200 turns after the first third, which warms up; a slow one takes 5 s at most. */
 async function timed(run: () => Promise<unknown>): Promise<number> {
   const times: number[] = [];
   const end = performance.now() + 5000;
-  while (times.length < 9 || (times.length < 60 && performance.now() < end)) {
+  while (times.length < 9 || (times.length < 200 && performance.now() < end)) {
     const began = performance.now();
     await run();
     times.push(performance.now() - began);
