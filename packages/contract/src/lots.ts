@@ -89,6 +89,8 @@ export const listLots = endpoint({
     leatherId: z.coerce.number().int().positive().optional(),
     /** Lots that are used up stay in the list unless only those on the rack are asked for. */
     onRack: z.enum(['yes', 'no']).optional(),
+    /** Only lots of which something is on the rack or out to be worked on. */
+    ours: z.literal('yes').optional(),
   }),
   reply: page(lot),
 });

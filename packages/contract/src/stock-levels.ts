@@ -25,6 +25,21 @@ const lotLevel = z.object({
   value: confidential(z.string()),
 });
 
+/** Leather of a lot that was out with a supplier to be worked on. */
+const lotOut = z
+  .object({
+    lotId: id,
+    tag: z.string(),
+    leatherName: z.string(),
+    service: z.string(),
+    supplierName: z.string(),
+    purchaseOrderNumber: z.string(),
+    areaMm2: z.string(),
+    value: confidential(z.string()),
+  })
+  .meta({ id: 'LotOut' });
+export type LotOut = z.infer<typeof lotOut>;
+
 export const leatherLevel = z
   .object({
     leatherId: id,
@@ -61,6 +76,7 @@ export const stockLevels = z
     leatherValue: confidential(z.string()),
     hardwareValue: confidential(z.string()),
     /** The shop's own leather that was out to be worked on: beside what was on hand, not in it. */
+    out: z.array(lotOut),
     outAreaMm2: z.string(),
     outValue: confidential(z.string()),
     value: confidential(z.string()),

@@ -4,7 +4,7 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
-import { readOut } from './read-out.ts';
+import { linesOut, readOut } from './read-out.ts';
 
 interface Asked {
   id?: number | undefined;
@@ -12,6 +12,7 @@ interface Asked {
   q?: string | undefined;
   leatherId?: number | undefined;
   onRack?: 'yes' | 'no' | undefined;
+  ours?: 'yes' | undefined;
   limit?: number;
 }
 
@@ -61,6 +62,7 @@ export async function readLotList(em: EntityManager, asked: Asked): Promise<LotR
       Array<string>(3).fill(`%${q}%`),
     ),
     ...when(asked.onRack, '(on_hand > 0) = ?', (onRack) => [onRack === 'yes' ? 1 : 0]),
+    ...when(asked.ours, `on_hand > 0 OR id IN (SELECT l.from_lot_id FROM ${linesOut})`, () => []),
   ]);
   const sql = `SELECT * FROM (${measured}) ${where} ORDER BY id DESC LIMIT ?`;
   const rows = await em.execute<Row[]>(sql, [...values, asked.limit ?? 1]);

@@ -96,6 +96,18 @@ describe('a lot that goes out', () => {
     });
   });
 
+  it('is still among the shop’s lots where all of it is out, and not on the rack', async () => {
+    const tagsOf = async (query: object) => {
+      const { body } = await owner().get('/api/lots').query(query).expect(200);
+      return (body.items as { tag: string }[]).map(({ tag }) => tag);
+    };
+    const order = await sent(dyeing());
+    expect(await tagsOf({ ours: 'yes' })).toContain(lot.tag);
+    expect(await tagsOf({ onRack: 'yes' })).not.toContain(lot.tag);
+    await receive(order, { lots: [back(order, 23)] }).expect(201);
+    expect(await tagsOf({ ours: 'yes' })).not.toContain(lot.tag);
+  });
+
   it('stays where a job holds it by then, and the order stays a draft', async () => {
     const order = (await draft(dyeing()).expect(201)).body;
     const { job } = await takenOn(ready, 50, { evenIfShort: true });
@@ -241,7 +253,12 @@ describe('the value of stock', () => {
       Math.round(100 * (Number(later.leatherValue) - Number(before.leatherValue))) / 100,
     ];
     expect(beyond(await levels('2026-12-01'))).toEqual([180, -180]);
+    const { out } = await levels('2026-12-01');
+    const { number: purchaseOrderNumber } = order;
+    expect(out.at(-1)).toMatchObject({ service: 'dyeing', purchaseOrderNumber, value: '180.00' });
+    expect(out.at(-1).areaMm2).toBe(ft2(20));
     expect(beyond(await levels('2026-12-02'))).toEqual([0, -180]);
+    expect((await levels('2026-12-02')).out).not.toContainEqual(out.at(-1));
     const maker = await shop.as('maker').get('/api/stock-levels').expect(200);
     expect(maker.text).not.toMatch(/"outValue":/);
   });

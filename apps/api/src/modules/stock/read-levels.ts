@@ -39,7 +39,7 @@ export async function readLevels(em: EntityManager, asked: Asked): Promise<Stock
   const standings = asked.isToday ? await readStandings(em) : undefined;
   const lots = asked.hardwareId === undefined ? await readLotRows(em, asked) : [];
   const pieces = asked.leatherId === undefined ? await readHardwareRows(em, asked) : [];
-  const out = asked.hardwareId === undefined ? await readOutAt(em, asked) : nothing;
+  const out = asked.hardwareId === undefined ? await readOutAt(em, asked) : [];
   const [leatherValue, hardwareValue] = [sumOf(lots, 'value'), sumOf(pieces, 'value')];
   return {
     on: asked.on,
@@ -55,13 +55,21 @@ export async function readLevels(em: EntityManager, asked: Asked): Promise<Stock
     leatherAreaMm2: area(sumOf(lots, 'quantity')),
     leatherValue: money(leatherValue),
     hardwareValue: money(hardwareValue),
-    outAreaMm2: area(out.quantity),
-    outValue: money(out.value),
+    out: out.map((row) => ({
+      lotId: row.lot_id,
+      tag: row.tag,
+      leatherName: row.leather_name,
+      service: row.service,
+      supplierName: row.supplier_name,
+      purchaseOrderNumber: row.number,
+      areaMm2: area(row.quantity),
+      value: money(row.value),
+    })),
+    outAreaMm2: area(sumOf(out, 'quantity')),
+    outValue: money(sumOf(out, 'value')),
     value: money(leatherValue + hardwareValue),
   };
 }
-
-const nothing = { quantity: 0, value: 0 };
 
 const money = (hundredths: number): string => moneyText(unscaled(hundredths, 2));
 const area = (thousandths: number): string => unscaled(thousandths, 3).toFixed();

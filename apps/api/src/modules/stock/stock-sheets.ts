@@ -22,7 +22,7 @@ const withValue = (shown: boolean, column: Column) => (shown ? [column] : []);
 const valueCell = (shown: boolean, value: string | undefined): Cell[] =>
   shown ? [value ?? null] : [];
 
-/** What was there at the end of a day: lot by lot, then hardware and supplies. */
+/** What was there at the end of a day: lot by lot, then hardware and supplies, then leather that was out. */
 export function levelsSheet(workshop: Workshop, levels: StockLevels, values: boolean): ListSheet {
   const unit = areaSigns[workshop.areaUnit];
   const worth = withValue(values, column(`At cost, ${workshop.currency}`, 'money'));
@@ -62,7 +62,29 @@ export function levelsSheet(workshop: Workshop, levels: StockLevels, values: boo
       ...valueCell(values, value),
     ]),
   };
-  return { workshopName: workshop.name, pages: [leather, hardware] };
+  const out: Page = {
+    name: `Out ${levels.on}`,
+    columns: [
+      column('Leather', 'text', 32),
+      column('Tag', 'text'),
+      column('Out for', 'text'),
+      column('With', 'text', 32),
+      column('Order', 'text'),
+      column(`Out, ${unit}`, 'measure'),
+      ...worth,
+    ],
+    rows: levels.out.map((row) => [
+      row.leatherName,
+      row.tag,
+      row.service,
+      row.supplierName,
+      row.purchaseOrderNumber,
+      area(workshop, row.areaMm2),
+      ...valueCell(values, row.value),
+    ]),
+  };
+  const pages = levels.out.length === 0 ? [leather, hardware] : [leather, hardware, out];
+  return { workshopName: workshop.name, pages };
 }
 
 export function movementsSheet(

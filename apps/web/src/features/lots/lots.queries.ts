@@ -12,6 +12,8 @@ import { call } from '../../lib/api.ts';
 interface Wanted {
   leatherId?: number | undefined;
   onRack?: 'yes' | undefined;
+  /** on the rack, or out to be worked on */
+  ours?: 'yes' | undefined;
 }
 
 /** Lots, newest first, page by page. */

@@ -14,7 +14,7 @@ import { StockroomNav } from './stockroom-nav.tsx';
 import { useRole } from './use-role.ts';
 
 const wanted = (search: URLSearchParams) =>
-  search.get('show') === 'all' ? {} : { onRack: 'yes' as const };
+  search.get('show') === 'all' ? {} : { ours: 'yes' as const };
 
 export async function loader({ request }: LoaderFunctionArgs) {
   await queryClient.ensureInfiniteQueryData(lotsQuery(wanted(new URL(request.url).searchParams)));
@@ -60,7 +60,7 @@ export function Component() {
       />
       <p className="mt-4">
         <TextLink to={all ? '/stockroom/lots' : '/stockroom/lots?show=all'}>
-          {all ? 'Only what is on the rack' : 'With what is used up'}
+          {all ? 'Only what is on the rack or out' : 'With what is used up'}
         </TextLink>
       </p>
     </>

@@ -8,6 +8,7 @@ import { InputFrame, inputLook } from '../../../components/input-frame.tsx';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import {
   HardwareLevels,
   LeatherLevels,
@@ -87,7 +88,7 @@ export function Component() {
               ...worth,
             ]}
           />
-          {levels.outAreaMm2 !== '0' && <OutBeside levels={levels} />}
+          {levels.out.length > 0 && <OutBeside levels={levels} />}
         </Card>
         <Card title="Leather">
           <LeatherLevels levels={levels} />
@@ -101,14 +102,22 @@ export function Component() {
 }
 
 /** The shop's own still, and on no rack. */
-function OutBeside({ levels: { outAreaMm2, outValue } }: { levels: StockLevels }) {
+function OutBeside({ levels: { out, outAreaMm2, outValue } }: { levels: StockLevels }) {
   const workshop = useWorkshop();
   const worth =
     outValue === undefined ? '' : `, ${workshop.currency} ${moneyText(outValue)} at cost`;
   return (
-    <p className="mt-4 text-ink-soft">
-      {`Beside it ${rackAreaText(outAreaMm2, workshop)} of leather is out to be worked on${worth}.`}
-    </p>
+    <div className="mt-4 text-ink-soft">
+      <p>{`Beside it ${rackAreaText(outAreaMm2, workshop)} of leather is out to be worked on${worth}:`}</p>
+      <ul className="mt-1 list-disc pl-5">
+        {out.map((each) => (
+          <li key={`${each.purchaseOrderNumber} ${each.tag}`}>
+            <TextLink to={`/stockroom/lots/${each.lotId}`}>{each.tag}</TextLink>
+            {` ${each.leatherName}, ${rackAreaText(each.areaMm2, workshop)}: ${each.service} with ${each.supplierName}, ${each.purchaseOrderNumber}`}
+          </li>
+        ))}
+      </ul>
+    </div>
   );
 }
 
