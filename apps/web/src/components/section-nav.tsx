@@ -14,8 +14,8 @@ interface SectionNavProps {
   items: readonly SectionLink[];
 }
 
-/** More places than a phone shows side by side. */
-const many = 5;
+/** As many places as a phone shows side by side. */
+const many = 4;
 
 /** The places within a room; the one where the person stands is underlined by a stitch. On a phone, many are folded away. */
 export function SectionNav({ label, items }: SectionNavProps) {

@@ -91,13 +91,16 @@ function readLotRows(em: EntityManager, { on, leatherId }: Asked): Promise<LotRo
   );
 }
 
-/** What is used up stays in the list: a nought is an answer too. */
+/** What is used up stays in the list: a nought is an answer too. A kit has none of its own to be used up. */
 function readHardwareRows(em: EntityManager, { on, hardwareId }: Asked): Promise<HardwareRow[]> {
   const { where, values } = whereAll(when(hardwareId, 'h.id = ?'));
   return em.execute(
     `SELECT h.id, h.name, h.kind, COALESCE(SUM(m.quantity), 0) AS quantity, COALESCE(SUM(m.value), 0) AS value
      FROM hardware h LEFT JOIN stock_movement m ON m.hardware_id = h.id AND m.day <= ?
-     ${where} GROUP BY h.id HAVING h.active = 1 OR COALESCE(SUM(m.quantity), 0) <> 0 ORDER BY h.kind, h.name`,
+     ${where} GROUP BY h.id
+     HAVING COALESCE(SUM(m.quantity), 0) <> 0
+       OR (h.active = 1 AND h.id NOT IN (SELECT kit_id FROM kit_part))
+     ORDER BY h.kind, h.name`,
     [on, ...values],
   );
 }
