@@ -25,6 +25,7 @@ export * from './money/amounts.ts';
 export * from './money/invoice-totals.ts';
 export * from './money/present-value.ts';
 export * from './money/payback.ts';
+export * from './money/straight-line.ts';
 export * from './money/creditor-reference.ts';
 
 export * from './outline/outline.ts';

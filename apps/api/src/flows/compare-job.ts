@@ -1,7 +1,7 @@
 import type { Compared, JobComparison } from '@hidewright/contract';
 import {
   compareRun,
-  goodShare,
+  rejectShare,
   toAtMost,
   type BreakNumbers,
   type CompareName,
@@ -47,7 +47,7 @@ function compareWork(job: Job, steps: JobStep[], used: Used, numbers: BreakNumbe
     good: job.quantity,
     minutes: numbers.benchMinutes,
     leatherAreaMm2: numbers.leatherAreaMm2,
-    rejectPercent: toAtMost(new Decimal(1).minus(goodShare(input.work)).times(100), 2),
+    rejectPercent: toAtMost(new Decimal(rejectShare(input.work)).times(100), 2),
   };
   const rows = compareRun({ estimate, fact }).map(({ name, unit, said, was }) => ({
     what: words[name],
@@ -57,7 +57,12 @@ function compareWork(job: Job, steps: JobStep[], used: Used, numbers: BreakNumbe
   }));
   return [
     ...rows,
-    { what: 'Seconds', unit: 'pieces', estimate: '0', fact: String(job.seconds) },
+    {
+      what: 'Seconds',
+      unit: 'pieces',
+      estimate: String(numbers.seconds),
+      fact: String(job.seconds),
+    },
     ...hardwareRow(
       hardware.reduce((sum, { quantity }) => sum + quantity, 0),
       used,

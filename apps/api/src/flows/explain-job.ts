@@ -4,19 +4,22 @@ import {
   boughtVariances,
   Exact,
   mm2ToFootage,
+  ticketSteps,
   timeVariances,
   toAtMost,
   toPlaces,
   type BreakNumbers,
   type CostKind,
+  type StepMinutes,
   type StepTimes,
+  type WorkStep,
 } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { moneyText } from '../http/decimal-text.ts';
 import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
-import { handledIn, stepLimits } from '../modules/jobs/step-limits.ts';
+import { handledAtEnd, stepLimits } from '../modules/jobs/step-limits.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
 import type { Work } from '../work.ts';
 import { estimateOf, numbersOf, type JobEstimate } from './job-estimate.ts';
@@ -67,10 +70,12 @@ function explainTime(
     restPercent: input.restPercent,
   };
   const said = benchMinutes(input.work, run).bySteps;
-  const handled = steps.map((step, at) => handledOf(step, limits[at] ?? 0));
-  const times = steps.map((step, at) =>
-    timesOf(step, handled[at] ?? 0, said[at]?.minutes ?? '0', input.restPercent),
-  );
+  const planned = ticketSteps(input.work);
+  const handled = steps.map((step, at) => handledAtEnd(step, limits[at] ?? 0));
+  const times = steps.map((step, at) => ({
+    ...timesOf(planned[at], said[at], handled[at] ?? 0, input.restPercent),
+    was: step.minutes.toString(),
+  }));
   const wages =
     used.minutes === null
       ? null
@@ -99,24 +104,21 @@ function explainTime(
 const wagePaid = ({ wages, minutes }: Used): string | null =>
   wages === null || minutes === null ? null : toAtMost(wages.times(60).div(minutes), 4);
 
-/** Where a step was not counted, all that could pass has passed: the job is finished. */
-function handledOf(step: JobStep, limit: number): number {
-  return step.per === 'run' ? 1 : handledIn(step) || limit;
-}
-
+/** Of the minutes that were said, all but the setting up goes with what was handled. */
 function timesOf(
-  step: JobStep,
+  step: WorkStep | undefined,
+  said: StepMinutes | undefined,
   handled: number,
-  said: string,
   restPercent: string | undefined,
-): StepTimes {
-  const forMade = new Exact(handled)
-    .times(step.secondsPerUnit.toString())
-    .div(60)
-    .plus(step.setupMinutes.toString())
+): Pick<StepTimes, 'said' | 'saidForMade'> {
+  if (step === undefined || said === undefined) return { said: '0', saidForMade: '0' };
+  const setup = new Exact(step.setupMinutes)
+    .times(step.people ?? 1)
     .times(new Exact(restPercent ?? '0').plus(100))
     .div(100);
-  return { said, saidForMade: toAtMost(forMade, 4), was: step.minutes.toString() };
+  const share = new Exact(said.units).isZero() ? 1 : new Exact(handled).div(said.units);
+  const forMade = new Exact(said.minutes).minus(setup).times(share).plus(setup);
+  return { said: said.minutes, saidForMade: toAtMost(forMade, 4) };
 }
 
 function explainLeather(

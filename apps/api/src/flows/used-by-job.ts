@@ -1,9 +1,11 @@
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
+import { ticketSteps } from '@hidewright/domain';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
 import { BenchLog } from '../modules/jobs/bench-log.entity.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
+import { handledAtEnd, stepLimits } from '../modules/jobs/step-limits.ts';
 import { minutesLogged } from '../modules/jobs/minutes-logged.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
 import { estimateOf } from './job-estimate.ts';
@@ -11,7 +13,7 @@ import { estimateOf } from './job-estimate.ts';
 /** What a job really used; null where nothing was logged that could say it. */
 export interface Used {
   minutes: Decimal | null;
-  /** What those minutes were paid: each at the wage of whoever logged it, else at the estimate's. */
+  /** What the work was paid: minutes at the wage of whoever logged them, else the estimate's; or by the piece. */
   wages: Decimal | null;
   leatherAreaMm2: string | null;
   leatherCost: Decimal | null;
@@ -35,13 +37,22 @@ export async function usedBy(em: EntityManager, job: Job, steps: JobStep[]): Pro
 }
 
 async function wagesOf(em: EntityManager, job: Job, steps: readonly JobStep[]): Promise<Decimal> {
-  const { wagePerHour } = estimateOf(job).input;
+  const { wagePerHour, wagesByStep = false, work } = estimateOf(job).input;
+  const planned = wagesByStep && work.kind === 'steps' ? ticketSteps(work) : [];
+  const limits = stepLimits(job, [...steps]);
+  const byPiece = steps.map((step, at) => {
+    const rate = planned[at]?.pieceRate ?? null;
+    return rate === null ? null : new Decimal(rate).times(handledAtEnd(step, limits[at] ?? 0));
+  });
   const logs = await em.find(BenchLog, { jobStepId: { $in: steps.map(({ id }) => id) } });
-  const paid = logs.reduce(
-    (sum, log) => sum.plus(log.minutes.times(log.wagePerHour ?? wagePerHour)),
-    new Decimal(0),
-  );
-  return paid.div(60);
+  const byHour = new Set(steps.filter((_, at) => byPiece[at] === null).map(({ id }) => id));
+  const paid = logs
+    .filter(({ jobStepId }) => byHour.has(jobStepId ?? 0))
+    .reduce(
+      (sum, log) => sum.plus(log.minutes.times(log.wagePerHour ?? wagePerHour)),
+      new Decimal(0),
+    );
+  return byPiece.reduce<Decimal>((sum, each) => sum.plus(each ?? 0), paid.div(60));
 }
 
 const taken = (moved: readonly StockMovement[]): number =>

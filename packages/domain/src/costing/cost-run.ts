@@ -42,9 +42,11 @@ export function costRun(
     restPercent: input.restPercent,
   });
   if (new Exact(bench.total).isZero()) {
-    throw new NotWorkable(
-      'Say how many minutes 100 pieces take: without bench time nothing is earned per hour.',
-    );
+    const what =
+      input.work.kind === 'steps'
+        ? 'Give a step of the pattern its setup or its seconds a piece, with somebody at it'
+        : 'Say how many minutes 100 pieces take';
+    throw new NotWorkable(`${what}: without bench time nothing is earned per hour.`);
   }
   const lines = new CostLines(input.minorDigits, quantity);
   const counts = hardwareCounts(input, quantity, cut.cutCount);

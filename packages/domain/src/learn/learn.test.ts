@@ -5,6 +5,7 @@ import { poolLeather } from './pool-leather.ts';
 import { poolLosses } from './pool-losses.ts';
 import { minutesPer100, poolMinutes } from './pool-minutes.ts';
 import { poolRejects } from './pool-shares.ts';
+import { benchMinutes, practiceFactor } from '../work/bench-minutes.ts';
 import { poolStepTime } from './pool-step-time.ts';
 import { unusualRuns } from './unusual-runs.ts';
 
@@ -118,6 +119,31 @@ describe('poolStepTime', () => {
   });
 
   it('says nothing where nothing was logged', () => expect(poolStepTime(said, [])).toBeNull());
+
+  const step = { name: 'Rivet', per: 'piece' as const, rejectPercent: '0' };
+  const curve = { model: 'unit' as const, curvePercent: '90', measuredAt: 50 };
+  it.each([
+    ['two at it', { people: 2 }, '0', null],
+    ['with rest', {}, '8', null],
+    ['left alone while it runs', { unattended: true }, '12', null],
+    ['with practice', {}, '0', curve],
+    ['all of it', { people: 3 }, '10', curve],
+  ])(
+    'learns from an estimate that came true what was said: %s',
+    (_, over, restPercent, learning) => {
+      const kept = { setupMinutes: '12', secondsPerUnit: '45', ...over };
+      const plan = { kind: 'steps' as const, steps: [{ ...step, ...kept }], learning };
+      const logged = [80, 200, 35].map((pieces) => ({
+        minutes: benchMinutes(plan, { pieces, containers: 1, restPercent }).total,
+        units: pieces,
+        practice: practiceFactor(learning, pieces),
+      }));
+      expect(poolStepTime(kept, logged, restPercent)).toMatchObject({
+        setupMinutes: '12',
+        secondsPerUnit: '45',
+      });
+    },
+  );
 
   it('takes as long for the same runs as was logged, but for the rounding of a hundredth', () => {
     fc.assert(

@@ -1,6 +1,7 @@
 import { InvalidInput } from '../errors/domain-error.ts';
 import { paybackYears } from '../money/payback.ts';
 import { presentValue } from '../money/present-value.ts';
+import { straightLine } from '../money/straight-line.ts';
 import { type DecimalText, Exact, readDecimal, toPlaces, toText } from '../numbers/decimal-text.ts';
 
 /** A press or a die that would save time, at a price. Money in major units. */
@@ -27,6 +28,8 @@ export interface MachinePays {
   paybackMonths: number | null;
   /** of everything that it saves and costs over its life, the price included, as worth today */
   presentValue: DecimalText;
+  /** what of the price each year of its life takes, in equal parts */
+  wornPerYear: DecimalText;
   /** the least runs a month, in tenths, with which it earns its price and the interest; null where none do */
   runsToPay: DecimalText | null;
 }
@@ -54,6 +57,7 @@ export function machinePays(machine: Machine): MachinePays {
     upkeepPerMonth: toPlaces(upkeep.div(12), 2),
     paybackMonths: years === null ? null : new Exact(years).times(12).toDP(1).toNumber(),
     presentValue: presentValue(rate, flows),
+    wornPerYear: straightLine({ price: toText(price), salvage: '0', years: machine.years }),
     runsToPay: savedByOneRun.isZero()
       ? null
       : toText(needed.div(savedByOneRun).toDP(1, Exact.ROUND_UP)),

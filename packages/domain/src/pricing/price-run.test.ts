@@ -4,6 +4,7 @@ import type { RunInput } from '../costing/run-input.ts';
 import { Exact } from '../numbers/decimal-text.ts';
 import type { BreakNumbers } from './run-numbers.ts';
 import { priceRun } from './price-run.ts';
+import { aFullRun } from './run.arbitrary.ts';
 
 /** 20 pieces per ft² of leather at 10.00, a rivet at 0.17 and a ring at 1.00, 150 minutes per 100. */
 const run: RunInput = {
@@ -145,6 +146,27 @@ describe('the numbers of a run', { timeout: 60_000 }, () => {
     );
   });
 
+  // A piece that is spoiled earlier costs the later steps nothing, so between two cut counts a few more early rejects
+  // may save them some seconds; at the last step nothing comes after.
+  it('never costs less with more rejects at the last step', () => {
+    fc.assert(
+      fc.property(aFullRun, fc.integer({ min: 1, max: 30 }), (full, more) => {
+        if (full.work.kind !== 'steps') return;
+        const last = full.work.steps.length - 1;
+        const steps = full.work.steps.map((step, at) => ({
+          ...step,
+          rejectPercent: String(Number(step.rejectPercent) + (at === last ? more : 0)),
+        }));
+        const input = { ...full, history: null };
+        const worse = priceRun({ ...input, work: { ...full.work, steps } }).breaks;
+        priceRun(input).breaks.forEach((rung, at) => {
+          expect(new Exact(worse[at]?.unitCost ?? 0).gte(rung.unitCost)).toBe(true);
+          expect(worse[at]?.cutCount).toBeGreaterThanOrEqual(rung.cutCount);
+        });
+      }),
+    );
+  });
+
   it('adds up: price times quantity, tooling on top, left and costs', () => {
     fc.assert(
       fc.property(aRun, (input) => {
@@ -214,6 +236,41 @@ describe('warnings', () => {
     expect(breaks[0]?.warnings).toEqual([]);
   });
 
+  it('looks beyond the next quantity for one that costs less', () => {
+    const breaks = [typed(10, '10.00'), typed(50, '9.00'), typed(100, '4.00')];
+    const rungs = priceRun({ ...run, breaks }).breaks;
+    // 40 at 10.00 cost as much as 100 at 4.00; and 50 at 9.00 cost more.
+    expect(rungs.map(({ cheaperFrom }) => cheaperFrom)).toEqual([41, 50, null]);
+    expect(rungs.map(({ cheaperQuantity }) => cheaperQuantity)).toEqual([100, 100, null]);
+    const dear = [typed(10, '10.00'), typed(50, '10.00'), typed(100, '0.90')];
+    expect(priceRun({ ...run, breaks: dear }).breaks[0]?.warnings.at(-1)).toMatch(
+      /^Ordering 100 costs less in total than 10:/,
+    );
+  });
+
+  it('warns where an option has no price yet, or rises with the quantity', () => {
+    const ring = { name: 'Brass ring', unitPrice: '0', perPiece: 1 };
+    const option = { name: 'the brass ring', hardware: [ring], typedExtra: null };
+    const { warnings } = priceRun({ ...run, options: [option] });
+    expect(warnings).toContain('Brass ring has no price yet and is counted as nothing: enter one.');
+    const breaks = [typed(20, '4.00'), typed(500, '4.00')];
+    const dearer = { ...option, hardware: [{ ...ring, unitPrice: '1.50' }] };
+    const tooling = [{ name: 'Plate', cost: '0', charge: '0' }];
+    const options = priceRun({ ...run, breaks, tooling, options: [dearer] }).options[0]?.breaks;
+    const rises = new Exact(options?.[1]?.priceEach ?? 0).gt(options?.[0]?.priceEach ?? 0);
+    const said = priceRun({ ...run, breaks, tooling, options: [dearer] }).warnings;
+    expect(said.some((each) => each.startsWith('With the brass ring the price rises'))).toBe(rises);
+  });
+
+  it('does not let a minimum order pass for a price that reaches the target', () => {
+    const small = { ...run, breaks: [typed(10, '0.05')], minimumOrder: '75.00' };
+    const { priceThatReachesTarget } = first(small);
+    expect(priceThatReachesTarget).toBe(
+      first({ ...small, minimumOrder: '0' }).priceThatReachesTarget,
+    );
+    expect(new Exact(priceThatReachesTarget).gt('1')).toBe(true);
+  });
+
   it('warns where the smaller quantity itself already costs more', () => {
     const { breaks } = priceRun({ ...run, breaks: [typed(100, '9.00'), typed(200, '4.00')] });
     expect(breaks[0]?.warnings).toEqual([
@@ -249,5 +306,10 @@ describe('bad input', () => {
   it('asks for bench time where there is none', () => {
     const work = { kind: 'minutesPer100' as const, minutes: '0', rejectPercent: '0' };
     expect(() => priceRun({ ...run, work })).toThrow('Say how many minutes 100 pieces take');
+    const idle = { setupMinutes: '0', secondsPerUnit: '60', unattended: true };
+    const steps = [{ ...idle, name: 'Press', per: 'piece' as const, rejectPercent: '0' }];
+    expect(() => priceRun({ ...run, work: { kind: 'steps', steps } })).toThrow(
+      'Give a step of the pattern its setup or its seconds a piece, with somebody at it',
+    );
   });
 });

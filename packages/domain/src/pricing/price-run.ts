@@ -7,7 +7,7 @@ import { optionBreaks } from './option-breaks.ts';
 import { rulePrice } from './rule-price.ts';
 import type { BreakNumbers, RunNumbers } from './run-numbers.ts';
 import { neverRising, notBelow, targetPrice } from './target-price.ts';
-import { breakWarnings, cheaperFrom, ladderWarnings } from './warnings.ts';
+import { breakWarnings, cheaperOrder, ladderWarnings } from './warnings.ts';
 
 /**
  * The numbers of a run at each quantity: what to cut, what it costs, which price keeps the rule, and
@@ -47,8 +47,13 @@ function ladderOf(input: RunInput, costs: readonly RunCost[]): BreakNumbers[] {
   const suggested = suggestedPrices(input, costs);
   const rungs = costs.map((cost, at) => rung(input, cost, suggested[at] as string));
   return rungs.map((each, at) => {
-    const withNext = { ...each, cheaperFrom: cheaperFrom(each, rungs[at + 1]) };
-    return { ...withNext, warnings: breakWarnings(input, withNext, rungs[at + 1]) };
+    const cheaper = cheaperOrder(each, rungs.slice(at + 1));
+    return {
+      ...each,
+      cheaperFrom: cheaper?.from ?? null,
+      cheaperQuantity: cheaper?.quantity ?? null,
+      warnings: breakWarnings(input, each, cheaper),
+    };
   });
 }
 

@@ -13,8 +13,10 @@ export interface BreakNumbers extends RunCost, Earnings {
   reachesTarget: boolean;
   /** the smallest price step with which this whole order, tooling included, reaches the target */
   priceThatReachesTarget: DecimalText;
-  /** from so many pieces on, the next larger quantity costs less in total; null where none does */
+  /** from so many pieces on, a larger quantity costs less in total; null where none does */
   cheaperFrom: number | null;
+  /** that larger quantity; left out in numbers that were kept when it was always the next one */
+  cheaperQuantity?: number | null;
   /** the same run again, its tooling paid for */
   reorderTotal: DecimalText;
   /** of what the customer sells a piece for, per cent that remains with them; null where unknown */

@@ -12,7 +12,8 @@ import { leastPrice } from './least-price.ts';
  * were in a hurry: that is the price to suggest, since charged once never goes into a unit price.
  */
 export function targetPrice(input: RunInput, cost: RunCost, tooling: boolean): DecimalText {
-  const asked = tooling ? input : withoutExtras(input);
+  // A minimum order would let any price reach it.
+  const asked = tooling ? { ...input, minimumOrder: '0' } : withoutExtras(input);
   const bought = sumOf(
     cost.costLines,
     isNot(...hourlyKinds, ...(tooling ? [] : ['tooling' as const])),

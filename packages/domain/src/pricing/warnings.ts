@@ -7,22 +7,35 @@ import type { StepMinutes } from '../work/bench-minutes.ts';
 import { ticketSteps } from '../work/work-plan.ts';
 import type { BreakNumbers, OptionNumbers } from './run-numbers.ts';
 
+/** A larger quantity that costs less in total than so many pieces at a rung's price. */
+interface CheaperOrder {
+  from: number;
+  quantity: number;
+}
+
 /**
- * From how many pieces on the next larger quantity costs less in total: the smallest count below
- * that quantity which, at this rung's price, comes to more than the whole next rung.
+ * From how many pieces on ordering a larger quantity costs less in total: the smallest count below the next rung
+ * which, at this rung's price, comes to more than the whole of a later rung; and that rung, the cheapest of those.
+ * @param later the rungs above, in rising order of quantity
  */
-export function cheaperFrom(here: BreakNumbers, next: BreakNumbers | undefined): number | null {
-  if (!next || new Exact(here.priceEach).lte(next.priceEach)) return null;
-  const level = new Exact(next.priceEach).times(next.quantity).div(here.priceEach);
+export function cheaperOrder(
+  here: BreakNumbers,
+  later: readonly BreakNumbers[],
+): CheaperOrder | null {
+  const [next] = later;
+  if (next === undefined || new Exact(here.priceEach).lte(0)) return null;
+  const totalOf = (rung: BreakNumbers) => new Exact(rung.priceEach).times(rung.quantity);
+  const least = later.reduce((best, rung) => (totalOf(rung).lt(totalOf(best)) ? rung : best), next);
+  const level = totalOf(least).div(here.priceEach);
   const from = Math.max(here.quantity, level.floor().toNumber() + 1);
-  return from < next.quantity ? from : null;
+  return from < next.quantity ? { from, quantity: least.quantity } : null;
 }
 
 /** What to say about one rung, in plain words. */
 export function breakWarnings(
   input: RunInput,
   here: BreakNumbers,
-  next: BreakNumbers | undefined,
+  cheaper: CheaperOrder | null,
 ): string[] {
   const warnings: string[] = [];
   if (here.loses) {
@@ -36,9 +49,9 @@ export function breakWarnings(
       `At ${here.quantity} it leaves ${here.perBenchHour} per bench hour, below your ${input.targetPerHour}: ${unitPriceInFull(here.priceThatReachesTarget, input.minorDigits)} each would reach it.`,
     );
   }
-  if (next && here.cheaperFrom === here.quantity) {
+  if (cheaper?.from === here.quantity) {
     warnings.push(
-      `Ordering ${next.quantity} costs less in total than ${here.quantity}: raise its price or lower this one.`,
+      `Ordering ${cheaper.quantity} costs less in total than ${here.quantity}: raise its price or lower this one.`,
     );
   }
   return [...warnings, ...belowFloor(input, here)];
@@ -63,17 +76,21 @@ export function ladderWarnings(
     ...unpaidTooling(input),
     ...withoutPrice(input),
     ...lowWages(input, breaks),
-    ...options.flatMap(weakOption),
+    ...options.flatMap((option) => weakOption(option, input.minorDigits)),
   ];
 }
 
-function risingPrices(breaks: readonly BreakNumbers[], digits: number): string[] {
+function risingPrices(
+  breaks: readonly BreakNumbers[],
+  digits: number,
+  what = 'The price',
+): string[] {
   return breaks.flatMap((here, at) => {
     const next = breaks[at + 1];
     if (!next || new Exact(next.priceEach).lte(here.priceEach)) return [];
     const [lower, higher] = [here, next].map((rung) => unitPriceInFull(rung.priceEach, digits));
     return [
-      `The price rises from ${lower} at ${here.quantity} to ${higher} at ${next.quantity}: a larger order should not cost more each.`,
+      `${what} rises from ${lower} at ${here.quantity} to ${higher} at ${next.quantity}: a larger order should not cost more each.`,
     ];
   });
 }
@@ -90,14 +107,15 @@ function unpaidTooling(input: RunInput): string[] {
 }
 
 /** Priced all the same, with what has no price counted as nothing. */
-function withoutPrice({ leather, hardware, supplies = [] }: RunInput): string[] {
-  const missing = [
+function withoutPrice({ leather, hardware, supplies = [], options = [] }: RunInput): string[] {
+  const bought = [...hardware, ...supplies, ...options.flatMap((option) => option.hardware)];
+  const missing = new Set([
     ...(new Exact(leather.pricePerFt2).isZero() ? [leather.name] : []),
-    ...[...hardware, ...supplies]
-      .filter(({ unitPrice }) => new Exact(unitPrice).isZero())
-      .map(({ name }) => name),
-  ];
-  return missing.map((name) => `${name} has no price yet and is counted as nothing: enter one.`);
+    ...bought.filter(({ unitPrice }) => new Exact(unitPrice).isZero()).map(({ name }) => name),
+  ]);
+  return [...missing].map(
+    (name) => `${name} has no price yet and is counted as nothing: enter one.`,
+  );
 }
 
 function lowWages(input: RunInput, breaks: readonly BreakNumbers[]): string[] {
@@ -116,11 +134,12 @@ function lowWages(input: RunInput, breaks: readonly BreakNumbers[]): string[] {
   return [...byHour, ...byPiece];
 }
 
-function weakOption({ name, breaks }: OptionNumbers): string[] {
+function weakOption({ name, breaks }: OptionNumbers, digits: number): string[] {
   const losing = breaks.filter(({ loses }) => loses);
   const missing = breaks.filter(({ loses, reachesTarget }) => !loses && !reachesTarget);
   const at = (rungs: readonly BreakNumbers[]) => rungs.map(({ quantity }) => quantity).join(', ');
   return [
+    ...risingPrices(breaks, digits, `With ${name} the price`),
     ...(losing.length > 0 ? [`With ${name} the run loses money at ${at(losing)}.`] : []),
     ...(missing.length > 0 ? [`With ${name} the target is missed at ${at(missing)}.`] : []),
   ];

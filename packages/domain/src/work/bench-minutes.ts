@@ -59,8 +59,12 @@ const one = new Exact(1);
 
 const isHandled = ({ per }: WorkStep): boolean => per === 'piece' || per === 'strike';
 
-/** Average time over the run against the average in the run where it was measured. */
-function practiceFactor(learning: Learning | null | undefined, pieces: number): Decimal {
+/**
+ * How practice shortens a piece or a strike: average time over the run against the average in the run where it was
+ * measured; 1 without a learning curve.
+ * @param pieces that are cut
+ */
+export function practiceFactor(learning: Learning | null | undefined, pieces: number): Decimal {
   if (!learning || pieces === 0) return one;
   const curve = Number(learning.curvePercent) / 100;
   const average = (n: number) => learnedTime(learning.model, curve, n).average;
@@ -92,6 +96,14 @@ export function goodShare(plan: WorkPlan): number {
   return ticketSteps(plan)
     .reduce((share, step) => share.times(shareLeft(step)), whole)
     .toNumber();
+}
+
+/**
+ * The share of pieces that fail at one step or another, seconds not among them; 0 up to below 1.
+ * @throws InvalidInput
+ */
+export function rejectShare(plan: WorkPlan): number {
+  return one.minus(sharesReaching(plan).at(-1) ?? one).toNumber();
 }
 
 /**

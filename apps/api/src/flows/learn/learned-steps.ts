@@ -3,28 +3,36 @@ import {
   matchSteps,
   poolRejects,
   poolStepTime,
+  practiceFactor,
   type CountedRejects,
   type LoggedStep,
 } from '@hidewright/domain';
 import type { JobStep } from '../../modules/jobs/job-step.entity.ts';
-import { countsPieces, handledIn, stepLimits } from '../../modules/jobs/step-limits.ts';
+import { countsPieces, handledAtEnd, handledIn, stepLimits } from '../../modules/jobs/step-limits.ts';
 import type { PastRun } from './past-runs.ts';
 
-type Step = Extract<PatternDefinition['work'], { kind: 'steps' }>['steps'][number];
+type Steps = Extract<PatternDefinition['work'], { kind: 'steps' }>;
+type Step = Steps['steps'][number];
 
 /** A step of a past run with how much can have passed there. */
 interface Passed {
   step: JobStep;
   limit: number;
+  /** Pieces that the run cut. */
+  cut: number;
 }
 
 /** What past runs say of each step of the pattern as it is now. */
-export function learnSteps(steps: readonly Step[], runs: readonly PastRun[]): LearnedStep[] {
-  const found = runs.map(({ job, steps: then }) => {
+export function learnSteps(
+  { steps, learning }: Steps,
+  runs: readonly PastRun[],
+  restPercent: string,
+): LearnedStep[] {
+  const found = runs.map(({ job, cut, steps: then }) => {
     const limits = stepLimits(job, then);
     return matchSteps(steps, then).map((at): Passed | null => {
       const step = at === null ? undefined : then[at];
-      return step === undefined ? null : { step, limit: limits[at ?? 0] ?? 0 };
+      return step === undefined ? null : { step, limit: limits[at ?? 0] ?? 0, cut };
     });
   });
   return steps.map((step, at) => {
@@ -35,16 +43,21 @@ export function learnSteps(steps: readonly Step[], runs: readonly PastRun[]): Le
       name: step.name,
       per: step.per,
       said: { setupMinutes, secondsPerUnit, rejectPercent },
-      time: poolStepTime(step, passed.flatMap(loggedTime)),
+      time: poolStepTime(
+        step,
+        passed.flatMap((each) => loggedTime(each, learning)),
+        restPercent,
+      ),
       rejects: poolRejects(passed.flatMap(countedRejects)),
     };
   });
 }
 
-/** The job is finished: where only minutes were logged, all that could pass has passed. */
-function loggedTime({ step, limit }: Passed): LoggedStep[] {
-  const units = step.per === 'run' ? 1 : handledIn(step) || limit;
-  return step.minutes.isZero() || units < 1 ? [] : [{ minutes: step.minutes.toString(), units }];
+function loggedTime({ step, limit, cut }: Passed, learning: Steps['learning']): LoggedStep[] {
+  const units = handledAtEnd(step, limit);
+  if (step.minutes.isZero() || units < 1) return [];
+  const practised = countsPieces(step) ? learning : null;
+  return [{ minutes: step.minutes.toString(), units, practice: practiceFactor(practised, cut) }];
 }
 
 function countedRejects({ step }: Passed): CountedRejects[] {

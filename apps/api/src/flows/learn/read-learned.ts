@@ -1,5 +1,5 @@
 import type { Learned, PastRun as PastRunReply, PatternDefinition } from '@hidewright/contract';
-import { goodShare, poolMinutes, poolRejects, toAtMost } from '@hidewright/domain';
+import { poolMinutes, poolRejects, practiceFactor, rejectShare, toAtMost } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { dayIn } from '../../day-in.ts';
 import { definitionFor, describeDesign } from '../../modules/designs/read-designs.ts';
@@ -14,6 +14,8 @@ import type { Work } from '../../work.ts';
 import { learnMaterials } from './learned-materials.ts';
 import { learnSteps } from './learned-steps.ts';
 import { customersOf, pastRuns, type PastRun } from './past-runs.ts';
+
+type Learning = PatternDefinition['work']['learning'];
 
 interface Asked {
   /** The jobs to leave out, by id. */
@@ -37,13 +39,13 @@ export async function readLearned(
     definitionOf(await latestVersion({ em }, pattern)),
     { patternId, customerId },
   );
-  const { timeZone } = await em.findOneOrFail(Workshop, 1);
+  const { timeZone, restPercent } = await em.findOneOrFail(Workshop, 1);
   const runs = await pastRuns(em, patternId, customerId);
   const mixed = runs.filter(({ job }) => !without.includes(job.id));
   const { work } = definition;
-  const steps = work.kind === 'steps' ? learnSteps(work.steps, mixed) : [];
+  const steps = work.kind === 'steps' ? learnSteps(work, mixed, restPercent.toString()) : [];
   const rejects = {
-    said: toAtMost(new Decimal(1).minus(goodShare(work)).times(100), 2),
+    said: toAtMost(new Decimal(rejectShare(work)).times(100), 2),
     found: poolRejects(mixed.flatMap(countedRejects)),
   };
   return {
@@ -57,12 +59,12 @@ export async function readLearned(
     runs: runs.map((run) => toReply(run, timeZone, !without.includes(run.job.id))),
     minutes: {
       said: work.kind === 'minutesPer100' ? work.minutes : null,
-      found: poolMinutes(mixed.flatMap(timed)),
+      found: poolMinutes(mixed.flatMap((run) => timed(run, work.learning, restPercent))),
     },
     rejects,
     steps,
     ...(await learnMaterials(em, definition, mixed)),
-    history: historyOf(definition, rejects.found, steps),
+    history: historyOf(definition, mixed, rejects.found, steps),
     version: pattern.version,
   };
 }
@@ -70,12 +72,17 @@ export async function readLearned(
 const countedRejects = ({ rejects, cut }: PastRun) =>
   rejects === null ? [] : [{ rejected: rejects, reached: cut }];
 
-const timed = ({ used, cut }: PastRun) =>
-  used.minutes === null ? [] : [{ minutes: used.minutes.toString(), pieces: cut }];
+/** An estimate adds rest to the minutes, and practice takes from them: what is learned is without either. */
+function timed({ used, cut }: PastRun, learning: Learning, restPercent: Decimal) {
+  if (used.minutes === null) return [];
+  const factor = restPercent.plus(100).div(100).times(practiceFactor(learning, cut).toString());
+  return [{ minutes: toAtMost(used.minutes.div(factor), 4), pieces: cut }];
+}
 
 /** The pieces stand behind all rejects or behind none: a step that nobody counted would pass for faultless. */
 function historyOf(
   { work }: PatternDefinition,
+  runs: readonly PastRun[],
   found: Learned['rejects']['found'],
   steps: Learned['steps'],
 ): Learned['history'] {
@@ -86,7 +93,11 @@ function historyOf(
           .filter(({ said }) => Number(said.rejectPercent) > 0)
           .map(({ name }) => name)
       : [];
-  const good = found === null ? 0 : found.reached - found.rejected;
+  // A piece that goes for less is no good one, though nothing rejected it.
+  const seconds = runs
+    .filter(({ rejects }) => rejects !== null)
+    .reduce((sum, { job }) => sum + job.seconds, 0);
+  const good = found === null ? 0 : found.reached - found.rejected - seconds;
   const kept = found !== null && good > 0 && uncounted.length === 0;
   return { good: kept ? good : null, of: kept ? found.reached : null, uncounted };
 }

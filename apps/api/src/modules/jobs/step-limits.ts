@@ -13,6 +13,10 @@ interface Counts {
 
 export const handledIn = (step: CountedStep): number => step.good + step.rejects + step.seconds;
 
+/** How many passed a step of a finished job: where nobody counted, all that could. */
+export const handledAtEnd = (step: CountedStep, limit: number): number =>
+  step.per === 'run' ? 1 : handledIn(step) || limit;
+
 /** Whether a step is counted in pieces, so that what fails there is a piece. */
 export const countsPieces = (step: Pick<CountedStep, 'per'>): boolean =>
   step.per === 'piece' || step.per === 'strike';

@@ -29,6 +29,7 @@ export function workshopRoutes(context: Context): Router {
     const workshop = await work.em.findOneOrFail(Workshop, 1);
     await requireVersion(work.em, { kind: 'workshop', id: 1, version: workshop.version }, ifMatch);
     requireKnownCurrency(body.currency);
+    await requireSameCurrency(work, workshop, body.currency);
     await beginValuing(work, workshop, body.stockValue);
     assignDefined(workshop, decimalsOf(body));
     await work.em.flush();
@@ -98,6 +99,22 @@ function requireKnownCurrency(code: string | undefined): void {
   if (code !== undefined && !currencies.some((currency) => currency.code === code)) {
     throw invalid([{ field: 'currency', message: 'Choose a currency from the list.' }]);
   }
+}
+
+/** Amounts on papers say no currency of their own: another one would give them another worth. */
+async function requireSameCurrency(
+  { em }: Work,
+  { currency }: Workshop,
+  asked: string | undefined,
+): Promise<void> {
+  if (asked === undefined || asked === currency) return;
+  const [papers] = await em.execute<[{ any: number }]>(
+    `SELECT EXISTS (SELECT 1 FROM quote) OR EXISTS (SELECT 1 FROM purchase_order)
+      OR EXISTS (SELECT 1 FROM stock_movement WHERE value <> 0) AS any`,
+  );
+  if (papers.any === 0) return;
+  const message = `Quotes, orders or stock are kept in ${currency}, and would mix with ${asked}. Keep ${currency}, or open a new shop in ${asked}.`;
+  throw invalid([{ field: 'currency', message }]);
 }
 
 function toReply(workshop: Workshop, mailAvailable: boolean): WorkshopReply {

@@ -50,6 +50,11 @@ function Answer({ typed, pays }: { typed: TypedMachine; pays: MachinePays }) {
               note: 'today, its price taken off',
             },
             {
+              word: 'worn off a year',
+              figure: moneyText(pays.wornPerYear),
+              note: 'its price in equal parts',
+            },
+            {
               word: 'pays from',
               figure: runsToPay === null ? 'no number' : numberText(runsToPay, 1),
               note: 'runs a month',

@@ -1,5 +1,5 @@
 import type { RunBasis } from '@hidewright/contract';
-import { goodShare } from '@hidewright/domain';
+import { rejectShare } from '@hidewright/domain';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { More } from '../../../components/more.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
@@ -45,4 +45,4 @@ function OwnRuns({ design }: { design: NonNullable<RunBasis['design']> }) {
 }
 
 /** Of all pieces cut, over all steps. */
-const rejectsOf = ({ input }: RunBasis): string => ((1 - goodShare(input.work)) * 100).toFixed(1);
+const rejectsOf = ({ input }: RunBasis): string => (rejectShare(input.work) * 100).toFixed(1);

@@ -38,7 +38,7 @@ export function PriceBreaksCard({ numbers, target, chosen, onChoose }: PriceBrea
         of the total after all costs.
       </p>
       <TypedPrices numbers={numbers} />
-      <Warnings numbers={numbers} chosen={chosen} />
+      <Warnings numbers={numbers} />
       <ChosenRung numbers={numbers} chosen={chosen} />
     </Card>
   );
@@ -60,16 +60,25 @@ function TypedPrices({ numbers }: Pick<PriceBreaksCardProps, 'numbers'>) {
   );
 }
 
-function Warnings({ numbers, chosen }: Pick<PriceBreaksCardProps, 'numbers' | 'chosen'>) {
+/** From where on a larger order costs less; where that is so for the rung itself, it is among its warnings. */
+function cheaperWords(
+  { quantity, priceEach, cheaperFrom, cheaperQuantity }: BreakNumbers,
+  later: readonly BreakNumbers[],
+): string[] {
+  const cheaper = later.find((rung) => rung.quantity === cheaperQuantity) ?? later[0];
+  if (cheaper === undefined || cheaperFrom === null || cheaperFrom <= quantity) return [];
+  return [
+    `From ${countText(cheaperFrom)} pieces at ${unitPriceText(priceEach)} on, ${countText(cheaper.quantity)} at ${unitPriceText(cheaper.priceEach)} cost less.`,
+  ];
+}
+
+function Warnings({ numbers }: Pick<PriceBreaksCardProps, 'numbers'>) {
   const losing = numbers.breaks.some((rung) => rung.loses);
-  const sentences = [...numbers.warnings, ...numbers.breaks.flatMap((rung) => rung.warnings)];
-  const steps = numbers.breaks.find((rung) => rung.quantity === chosen);
-  const next = numbers.breaks.find((rung) => rung.quantity > chosen);
-  if (steps && next && steps.cheaperFrom !== null && steps.cheaperFrom > steps.quantity) {
-    sentences.push(
-      `From ${countText(steps.cheaperFrom)} pieces at ${unitPriceText(steps.priceEach)} on, ${countText(next.quantity)} at ${unitPriceText(next.priceEach)} cost less.`,
-    );
-  }
+  const sentences = [
+    ...numbers.warnings,
+    ...numbers.breaks.flatMap((rung) => rung.warnings),
+    ...numbers.breaks.flatMap((rung, at) => cheaperWords(rung, numbers.breaks.slice(at + 1))),
+  ];
   if (sentences.length === 0) return null;
   return (
     <Notice tone={losing ? 'danger' : 'attention'} className="mt-3">

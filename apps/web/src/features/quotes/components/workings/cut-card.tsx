@@ -1,4 +1,4 @@
-import type { BreakNumbers, RunInput } from '@hidewright/domain';
+import { rejectShare, type BreakNumbers, type RunInput } from '@hidewright/domain';
 import { Card } from '../../../../components/card.tsx';
 import { KeyFigures } from '../../../../components/key-figures.tsx';
 import { countText, percentText } from '../../../../lib/formatting.ts';
@@ -36,6 +36,11 @@ export function CutCard({ input, rung }: CutCardProps) {
             word: `in whole ${input.layout.form}s`,
             figure: countText(cutPieces),
             note: `${countText(containers)} ${noun}, ${countText(overs)} over`,
+          },
+          {
+            word: 'come through all steps',
+            figure: chance(1 - rejectShare(input.work)),
+            note: 'the rolled yield, seconds among them',
           },
           {
             word: 'plain allowance',

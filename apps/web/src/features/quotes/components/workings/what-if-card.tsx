@@ -1,6 +1,6 @@
 import {
   DomainError,
-  goodShare,
+  rejectShare,
   priceRun,
   withMinutes,
   withRejects,
@@ -110,7 +110,7 @@ function Figure({ label, unit, value, onChange }: FigureProps) {
 function startingFrom(input: RunInput, rung: BreakNumbers): Supposed {
   return {
     price: rung.priceEach,
-    rejects: new Decimal(1).minus(goodShare(input.work)).times(100).toDecimalPlaces(2).toFixed(),
+    rejects: new Decimal(rejectShare(input.work)).times(100).toDecimalPlaces(2).toFixed(),
     minutes: '100',
     leather: input.leather.pricePerFt2,
   };
