@@ -1,6 +1,13 @@
 import { Decimal } from 'decimal.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { Job, JobComparison, JobVariances, Person } from '@hidewright/contract';
+import type {
+  Job,
+  JobComparison,
+  JobVariances,
+  Learned,
+  Pattern,
+  Person,
+} from '@hidewright/contract';
 import { readyForTheBench, takenOn, ticketOf, type BenchShop } from '../../testing/bench-shop.ts';
 import { finishedRun } from '../../testing/finished-run.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
@@ -122,5 +129,47 @@ describe('an hour that was paid otherwise than the shop’s wage', () => {
     expect(row?.fact).toBe('47.00');
     expect(new Decimal(row?.fact ?? 0).minus(row?.estimate ?? 0).toFixed(2)).toBe(wages?.sum);
     await paid.shop.close();
+  });
+});
+
+describe('two at a step, one paid by the piece, and rest for all', () => {
+  it('are told and learned as they were said', async () => {
+    const shared = await readyForTheBench(await startTestShop());
+    const owner = shared.shop.as('owner');
+    const change = async (path: string, body: (now: Pattern) => object) => {
+      const now = (await owner.get(path).expect(200)).body as Pattern;
+      await owner.patch(path).set('If-Match', `"${now.version}"`).send(body(now)).expect(200);
+    };
+    await change('/api/workshop', () => ({ restPercent: '10' }));
+    await change(`/api/patterns/${shared.patternId}`, ({ definition }) => {
+      const { work } = definition;
+      if (work.kind !== 'steps') throw new TypeError('The pattern is worked in steps');
+      const said = { Stamp: { people: 2 }, Cut: { pieceRate: '0.10' } };
+      const steps = work.steps.map((step) => ({
+        ...step,
+        ...(step.name in said && said[step.name as keyof typeof said]),
+      }));
+      return { definition: { ...definition, work: { ...work, steps } } };
+    });
+    const job = await finishedRun(shared, logs);
+    const reply = await owner.get(`/api/jobs/${job.id}/variances`).expect(200);
+    const { steps, wages } = reply.body as JobVariances;
+    // 56 strikes at 12 s and 5 minutes of setup by two, and a tenth for rest: 35.64 minutes; 19 were logged.
+    expect(steps[1]).toMatchObject({
+      name: 'Stamp',
+      saidForMade: '35.64',
+      money: { time: '-6.10' },
+    });
+    const { money } = (await owner.get(`/api/jobs/${job.id}/comparison`).expect(200))
+      .body as JobComparison;
+    const row = money?.find(({ what }) => what === 'Bench wages');
+    // 84 minutes at 22 an hour, and 52 pieces at 0.10.
+    expect(row?.fact).toBe('36.00');
+    expect(new Decimal(row?.fact ?? 0).minus(row?.estimate ?? 0).toFixed(2)).toBe(wages?.sum);
+    const found = (await owner.get(`/api/patterns/${shared.patternId}/learned`).expect(200))
+      .body as Learned;
+    // 19 / (2 × 1.1) minutes less 5 of setup, over 56 strikes; the piece-paid step's 10 / 1.1 over 52.
+    expect(found.steps[1]?.time?.secondsPerUnit).toBe('3.9');
+    await shared.shop.close();
   });
 });

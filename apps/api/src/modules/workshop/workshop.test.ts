@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { orderMore, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 
 let shop: Awaited<ReturnType<typeof startTestShop>>;
@@ -48,6 +49,17 @@ describe('the shop’s starting values', () => {
     const { status, body } = await change({ [field]: value });
     expect(status).toBe(422);
     expect(body.errors[0].field).toBe(field);
+  });
+
+  it('keep their currency once something is kept in it', async () => {
+    const statusOf = async (currency: string) => (await change({ currency })).status;
+    expect([await statusOf('EUR'), await statusOf('USD')]).toEqual([200, 200]);
+    await orderMore(shop, await stockUp(shop));
+    const { status, body } = await change({ currency: 'EUR' });
+    expect(status).toBe(422);
+    expect(body.errors[0]).toMatchObject({ field: 'currency' });
+    expect(body.errors[0].message).toMatch(/^Quotes, orders or stock are kept in USD/);
+    expect(await statusOf('USD')).toBe(200);
   });
 
   it('[S15] tell the maker no prices', async () => {
