@@ -12,7 +12,6 @@ import { countsPieces, handledAtEnd, handledIn, stepLimits } from '../../modules
 import type { PastRun } from './past-runs.ts';
 
 type Steps = Extract<PatternDefinition['work'], { kind: 'steps' }>;
-type Step = Steps['steps'][number];
 
 /** A step of a past run with how much can have passed there. */
 interface Passed {
