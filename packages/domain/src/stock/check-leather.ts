@@ -25,6 +25,8 @@ export interface LotTaken {
 export interface LeatherFacts {
   leather: LeatherStock;
   takes: LotTaken[];
+  /** tags of lots that have something free, of which no panel can be cut whole */
+  tooSmall: string[];
   /** more than one where they would mix */
   shades: string[];
   likeShade: string | null;
@@ -64,6 +66,7 @@ export function drawLeather(
   const facts = {
     leather,
     takes,
+    tooSmall: offered.filter(noneFits).map(({ lot }) => lot.tag),
     shades: shadesOf(offers, chosen),
     likeShade: need.likeShade,
     piecesNeeded: when.pieces,
@@ -80,6 +83,9 @@ const toOffer = ({ lot: { lotId, shade, receivedOn }, from: { pieces } }: Offere
   receivedOn,
   pieces,
 });
+
+const noneFits = ({ lot, from }: Offered): boolean =>
+  from.by === 'panels' && from.pieces === 0 && lot.freeArea > 0;
 
 /** Pieces that may be cut now without taking what jobs taken on before still need. */
 function notOwed({ lots, owed }: LeatherStock, { cut }: LeatherNeed): number {

@@ -113,6 +113,20 @@ describe('Can we make it?', () => {
     expect(hoursWords(facts!.hours, say)).toBe('Bench hours: 2 of the 48 free by 2026-12-10.');
   });
 
+  it('names the lots that are too small for the panels, and counts nothing of them', () => {
+    const sides = { widthMm: 300, heightMm: 400 };
+    const narrow = { panel: { widthMm: 3000, heightMm: 100 }, offcuts: 1 };
+    const lots = [2, 3, 4, 5, 6].map((id) => lot(id, 3, narrow));
+    const asked = run(24);
+    const leather = { ...asked.leather, cut: { ...asked.leather.cut, sides } };
+    const stock = shop({ leathers: [russet([lot(1, 1), ...lots])] });
+    const [facts] = checkRuns(stock, [{ ...asked, leather }]);
+    expect(facts!.leather.takes.map(({ lot: { tag } }) => tag)).toEqual(['L-1']);
+    expect(leatherWords(facts!.leather, say)).toContain(
+      '120000 mm² free, 120000 mm² short. Too small for its panels: L-2, L-3, L-4 and 2 more. Buy',
+    );
+  });
+
   it('names what is short, what mends it, and by when the run can be had', () => {
     const poor = shop({ items: [rivets(40)], tools: [] });
     const [facts] = checkRuns(poor, [run(150, '2026-12-03')]);

@@ -91,7 +91,18 @@ export function leatherWords(facts: LeatherFacts, say: Say): string {
   const head = `${leather.name}: ${area(needed)} needed, ${area(free)} free, ${area(short)} short.`;
   const missing = standing.buy - standing.drafted;
   const buy = missing > 0 ? buyLeatherWords(leather, missing, say) : null;
-  return [head, ...remedy(standing, leather.buying, buy, say), ...shades].join(' ');
+  const small = smallWords(facts);
+  return [head, ...small, ...remedy(standing, leather.buying, buy, say), ...shades].join(' ');
+}
+
+/** Why leather that hangs there is not counted as free. */
+function smallWords({ tooSmall }: LeatherFacts): string[] {
+  if (tooSmall.length === 0) return [];
+  const named = tooSmall.slice(0, 3).join(', ');
+  const others = tooSmall.length - 3;
+  return [
+    `Too small for its panels: ${named}${others > 0 ? ` and ${countWords(others)} more` : ''}.`,
+  ];
 }
 
 function buyLeatherWords(leather: LeatherFacts['leather'], missing: number, say: Say): string {

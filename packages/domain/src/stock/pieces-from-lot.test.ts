@@ -48,8 +48,64 @@ describe('piecesFromLot', () => {
     expect(piecesFromLot(bundle, cut)).toMatchObject({ pieces: 8 * 12, by: 'panels' });
     const double = { ...bundle, panel: { widthMm: 410, heightMm: 610 } };
     expect(piecesFromLot(double, cut)).toMatchObject({ pieces: 3 * 24, perUnit: 24 });
-    const small = { ...bundle, panel: { widthMm: 250, heightMm: 300 } };
-    expect(piecesFromLot(small, cut).by).toBe('area');
+  });
+
+  it('cuts nothing from panels, strips or offcuts that are too narrow, whatever their area', () => {
+    const small = { ...side, panel: { widthMm: 250, heightMm: 300 } };
+    const none = piecesFromLot(small, cut);
+    expect(none).toMatchObject({ pieces: 0, by: 'panels' });
+    expect(areaForPieces(small, none, none.pieces)).toBe(0);
+    const strip = { ...side, panel: { widthMm: 3000, heightMm: 100 }, offcuts: 1 };
+    expect(piecesFromLot(strip, cut).pieces).toBe(0);
+    // Where nobody knows the sides of the pattern's panel, the area is all there is to go by.
+    expect(piecesFromLot(strip, { ...cut, sides: null })).toMatchObject({
+      pieces: 14 * 12,
+      by: 'area',
+    });
+  });
+
+  it('cuts from an offcut what lies within its sides and within its area', () => {
+    const offcut = (widthMm: number, heightMm: number, area = widthMm * heightMm): LotToCut => ({
+      ...side,
+      freeArea: mm2(area),
+      measuredArea: mm2(area),
+      panel: { widthMm, heightMm },
+      offcuts: 1,
+    });
+    expect(piecesFromLot(offcut(400, 300), cut)).toMatchObject({ pieces: 12, perUnit: 12 });
+    expect(piecesFromLot(offcut(650, 420), cut).pieces).toBe(24);
+    // A corner is gone: two would lie within the sides, and only one within the area.
+    expect(piecesFromLot(offcut(600, 400, 239_999), cut).pieces).toBe(12);
+    expect(piecesFromLot(offcut(400, 300, 119_999), cut).pieces).toBe(0);
+    // One of its two panels is gone with its share of the waste; or the only one, and its waste is left.
+    const half = { ...offcut(650, 420), freeArea: mm2(650 * 210) };
+    expect(piecesFromLot(half, cut).pieces).toBe(12);
+    const waste = { ...offcut(550, 550), freeArea: mm2(550 * 550 - 120_000) };
+    expect(piecesFromLot(waste, cut).pieces).toBe(0);
+    expect(piecesFromLot({ ...offcut(300, 400, 360_000), offcuts: 3 }, cut).pieces).toBe(36);
+  });
+
+  it('loses no panel of an offcut and leaves no crumb of it, in however many goes it is used', () => {
+    const sides = fc.record({
+      widthMm: fc.integer({ min: 300, max: 3000 }),
+      heightMm: fc.integer({ min: 400, max: 3000 }),
+      odd: fc.nat(2),
+    });
+    fc.assert(
+      fc.property(sides, ({ odd, ...panel }) => {
+        const area = mm2(panel.widthMm * panel.heightMm) - odd;
+        const whole: LotToCut = { ...side, freeArea: area, measuredArea: area, panel, offcuts: 1 };
+        const first = piecesFromLot(whole, cut);
+        let left = whole;
+        for (let pieces = first.pieces; pieces > 0; pieces -= 12) {
+          const from = piecesFromLot(left, cut);
+          expect(from.pieces).toBe(pieces);
+          left = { ...left, freeArea: left.freeArea - areaForPieces(left, from, 12) };
+        }
+        expect(piecesFromLot(left, cut).pieces).toBe(0);
+        if (first.pieces > 0) expect(left.freeArea).toBe(0);
+      }),
+    );
   });
 
   it('keeps to whole numbers where a share would not end', () => {

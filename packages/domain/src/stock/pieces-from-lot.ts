@@ -20,8 +20,10 @@ export interface LotToCut {
   measuredArea: number;
   /** the share of it that can be cut where nothing is drawn: 1 to 100, to the ten-thousandth */
   usablePercent: number;
-  /** the sides of one panel or strip of the bundle; null for anything else */
+  /** the sides of one panel or strip of the bundle, or at most of an offcut; null where no sides are known */
   panel: { widthMm: number; heightMm: number } | null;
+  /** how many offcuts of at most those sides it is: one may have a corner gone; absent of ready panels and strips */
+  offcuts?: number;
   /** area inside its drawn edge less its flaws; null where it is not drawn */
   drawnArea: number | null;
 }
@@ -42,8 +44,9 @@ export const panelArea = (cut: Pick<CutFrom, 'areaMm2'>): number =>
 
 /**
  * How many pieces of a pattern a lot still gives. Laid out as drawn, its layout's count, in proportion to what is
- * free of it; of ready panels, whole ones; otherwise as many of the pattern's panels as the usable share holds
- * beside what is gone already. All by area, but for the layout: a share of waste stays with the lot.
+ * free of it; of ready panels, whole ones; of offcuts whose sides are known, as many of the pattern's panels as lie
+ * within those sides and within their area; otherwise as many as the usable share holds beside what is gone already.
+ * Where sides are known on both hands and none fits, the area gives nothing either.
  * @param laid pieces that a layout on it as drawn gives, of the whole lot; null where none is laid out
  * @param panel the area of the pattern's panel: `panelArea(cut)`
  */
@@ -54,10 +57,14 @@ export function piecesFromLot(
   panel = panelArea(cut),
 ): PiecesOfLot {
   if (laid !== null) return byLayout(lot, laid);
-  const perPanel = lot.panel === null ? 0 : panelsWithin(lot.panel, cut);
-  return lot.panel !== null && perPanel > 0
-    ? byPanels(lot, lot.panel, perPanel * cut.pieces)
-    : byArea(lot, cut.pieces, panel);
+  if (lot.panel === null || cut.sides === null) return byArea(lot, cut.pieces, panel);
+  const within = panelsWithin(lot.panel, cut.sides);
+  const most = Math.min(within * (lot.offcuts ?? 1), Math.floor(lot.measuredArea / panel));
+  if (most === 0)
+    return { pieces: 0, by: 'panels', perUnit: cut.pieces, units: { count: 1, area: panel } };
+  return lot.offcuts === undefined
+    ? byPanels(lot, lot.panel, within * cut.pieces)
+    : byOffcuts(lot, most, cut.pieces);
 }
 
 /** Area of a lot in thousandths of mm² that goes for so many of its pieces, never more than is free. */
@@ -86,6 +93,20 @@ function byPanels(
   return { pieces, by: 'panels', perUnit, units: { count: 1, area } };
 }
 
+/**
+ * Each of the pattern's panels goes with its share of the offcut's waste, so that what is left of one that is partly
+ * used gives no more than its share. A thousandth lost each time one goes costs no panel.
+ */
+function byOffcuts(
+  { freeArea, measuredArea }: LotToCut,
+  most: number,
+  perUnit: number,
+): PiecesOfLot {
+  const left = Math.min(most, divided(freeArea + most, most, measuredArea, 'down'));
+  const units = { count: most, area: measuredArea };
+  return { pieces: left * perUnit, by: 'panels', perUnit, units };
+}
+
 function byArea(lot: LotToCut, perUnit: number, area: number): PiecesOfLot {
   const pieces = Math.floor(usableArea(lot) / area) * perUnit;
   return { pieces, by: 'area', perUnit, units: { count: 1, area } };
@@ -112,9 +133,8 @@ function divided(area: number, part: number, whole: number, rounded: 'up' | 'dow
 /** How many of the pattern's panels lie side by side within one of the bundle, the better way round. */
 function panelsWithin(
   { widthMm, heightMm }: { widthMm: number; heightMm: number },
-  { sides }: CutFrom,
+  sides: NonNullable<CutFrom['sides']>,
 ): number {
-  if (sides === null) return 0;
   const within = (width: number, height: number) =>
     Math.floor(width / sides.widthMm) * Math.floor(height / sides.heightMm);
   return Math.max(within(widthMm, heightMm), within(heightMm, widthMm));

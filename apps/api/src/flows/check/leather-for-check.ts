@@ -34,6 +34,7 @@ export interface LotRow {
   shade: string;
   received_on: string;
   form: Lot['form'];
+  pieces: number;
   measured_area_mm2: number;
   usable_percent: number;
   width_mm: number | null;
@@ -46,8 +47,8 @@ export interface LotRow {
 /** Every lot of some leathers that has something free, oldest number first. */
 export function freeLotRows(em: EntityManager, leatherIds: readonly number[]): Promise<LotRow[]> {
   return em.execute<LotRow[]>(
-    `SELECT l.id, l.tag, l.leather_id, l.place, l.shade, l.received_on, l.form, l.measured_area_mm2, l.usable_percent,
-      l.width_mm, l.height_mm, l.outline, l.flaws, b.on_hand - b.reserved AS free
+    `SELECT l.id, l.tag, l.leather_id, l.place, l.shade, l.received_on, l.form, l.pieces, l.measured_area_mm2,
+      l.usable_percent, l.width_mm, l.height_mm, l.outline, l.flaws, b.on_hand - b.reserved AS free
     FROM lot l JOIN stock_balance b ON b.lot_id = l.id
     WHERE l.leather_id IN (SELECT value FROM json_each(?)) AND b.on_hand > b.reserved ORDER BY l.id`,
     [JSON.stringify(leatherIds)],
@@ -65,14 +66,16 @@ export function toRackLot(row: LotRow): LeatherStock['lots'][number] {
     measuredArea: row.measured_area_mm2,
     usablePercent: row.usable_percent / 10_000,
     panel: panelOf(row),
+    ...(row.form === 'offcut' && { offcuts: row.pieces }),
     drawnArea: drawnArea(row),
   };
 }
 
-/** Ready panels and strips have straight sides; a whole side has none that a panel could be measured by. */
+const withSides: ReadonlySet<Lot['form']> = new Set(['panel', 'strip', 'offcut']);
+
+/** Ready panels and strips have straight sides, and an offcut lies within its own; a whole side has none to go by. */
 function panelOf({ form, width_mm, height_mm }: LotRow) {
-  if ((form !== 'panel' && form !== 'strip') || width_mm === null || height_mm === null)
-    return null;
+  if (!withSides.has(form) || width_mm === null || height_mm === null) return null;
   return {
     widthMm: unscaled(width_mm, 6).toNumber(),
     heightMm: unscaled(height_mm, 6).toNumber(),

@@ -171,6 +171,43 @@ describe('Can we make them?', () => {
   });
 });
 
+describe('offcuts and ready panels on the rack', () => {
+  const run = (quantity: number) => ({ patternId: ready.patternId, quantity, by: '2026-12-16' });
+  const hang = async (...lots: object[]) => {
+    const asked = lots.map((lot) => ({ leatherId: ready.leatherId, cost: '10.00', ...lot }));
+    await as('owner').post('/api/receipts').send({ lots: asked }).expect(201);
+  };
+
+  /** Nothing but offcuts and panels is on the rack. */
+  beforeEach(async () => {
+    const gone = { of: 'lot', lotId: ready.lotId, areaMm2: '0', reason: 'sold whole' };
+    await as('owner').post('/api/adjustments').send(gone).expect(201);
+  });
+
+  it('cut from an offcut what lies within its sides, and nothing from one that is too narrow', async () => {
+    const narrow = { tag: 'OC-1', form: 'offcut', widthMm: '3000', heightMm: '100' };
+    const wide = { tag: 'OC-2', form: 'offcut', widthMm: '600', heightMm: '340' };
+    await hang({ ...narrow, measuredAreaMm2: '300000' }, { ...wide, measuredAreaMm2: '204000' });
+    const [small] = (await check([run(5)])).runs;
+    expect(small?.lots).toMatchObject([{ tag: 'OC-2', by: 'panels', takesAreaMm2: '102000' }]);
+    expect(small?.lots[0]?.sentence).toMatch(/^1 panel for \d pieces; 1 more fits$/);
+    const [large] = (await check([run(50)])).runs;
+    expect(large?.lots).toMatchObject([{ tag: 'OC-2', pieces: 16 }]);
+    expect(large?.answers[0]).toMatchObject({ freeNow: '204000', enough: false });
+  });
+
+  it('say what is short in plain words where none of them is large enough', async () => {
+    const small = { tag: 'PN-1', form: 'panel', widthMm: '250', heightMm: '300', pieces: 40 };
+    await hang({ ...small, measuredAreaMm2: '3000000' });
+    const [found] = (await check([run(5)])).runs;
+    expect(found?.lots).toEqual([]);
+    expect(found?.answers[0]).toMatchObject({ freeNow: '0', free: '0', enough: false });
+    expect(found?.answers[0]?.sentence).toBe(
+      'Oak tan 5–6 oz: 0.99 ft² needed, 0 ft² free, 0.99 ft² short. Too small for its panels: PN-1. Buy about 1.2 ft² more, or receive it if it is here. Say who sells it, and the day can be told.',
+    );
+  });
+});
+
 describe('hardware that something else could do for, or the customer brings', () => {
   const run = () => ({ patternId: ready.patternId, quantity: 200, by: '2026-12-21' });
 
