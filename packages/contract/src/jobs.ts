@@ -119,14 +119,21 @@ const amountOfStock = z.union([
   z.strictObject({ hardwareId: id, quantity: positiveCount }),
 ]);
 
+/** The same; whoever takes what is held says how much they saw held, so that two who press at once take it once. */
+const taking = z.union([
+  z.strictObject({ lotId: id, areaMm2: someArea, heldSeenAreaMm2: areaMm2.optional() }),
+  z.strictObject({ hardwareId: id, quantity: positiveCount, heldSeenQuantity: count.optional() }),
+]);
+
 export const takeForJob = endpoint({
   method: 'POST',
   path: '/jobs/{id}/takings',
-  summary: 'Take leather from a lot, or hardware, for the job',
+  summary:
+    'Take leather from a lot, or hardware, for the job; nothing where other than was seen is held',
   access: bench,
   creates: true,
   params: idParams,
-  body: amountOfStock,
+  body: taking,
   reply: job,
 });
 

@@ -224,6 +224,32 @@ describe('taking', () => {
     ]);
   });
 
+  it('takes once what two take who saw the same held', async () => {
+    const held = ticket.lots[0]?.heldAreaMm2 ?? '';
+    const leather = { lotId: ready.lotId, areaMm2: held, heldSeenAreaMm2: held };
+    const replies = await Promise.all([post('takings', leather), post('takings', leather)]);
+    expect(replies.map(({ status }) => status).sort()).toEqual([201, 409]);
+    const refused = replies.find(({ status }) => status === 409);
+    expect(refused?.body.detail).toMatch(
+      /^Nothing of lot OT-118 is held for J-0001 any more: it was taken already, or let go of\./,
+    );
+    expect((await ticketOf(ready, order)).lots[0]).toMatchObject({ takenAreaMm2: held });
+    const { hardwareId } = ready;
+    await post('reservations', { hardwareId, quantity: 5 }).expect(201);
+    const fewer = { hardwareId, quantity: 100, heldSeenQuantity: 100 };
+    expect((await post('takings', fewer).expect(409)).body).toMatchObject({
+      detail:
+        '105 of Rivet 9 mm is held for J-0001 now, not 100 as before. Nothing is taken now. Look at the ticket, then take it again.',
+      allowed: ['take 105'],
+    });
+    await post('takings', { hardwareId, quantity: 105, heldSeenQuantity: 105 }).expect(201);
+    await post('takings', { hardwareId, quantity: 100, heldSeenQuantity: 105 }).expect(409);
+    // Whoever types how many may take what is free beyond.
+    const more = await post('takings', { hardwareId, quantity: 20 }).expect(201);
+    expect((more.body as Job).hardware).toMatchObject([{ held: 0, taken: 125 }]);
+    await post('takings', { hardwareId, quantity: 20, heldSeenQuantity: -1 }).expect(422);
+  });
+
   it('refuses more than there is, nothing, and another leather', async () => {
     await post('takings', { hardwareId: ready.hardwareId, quantity: 301 }).expect(409);
     await post('takings', { lotId: ready.lotId, areaMm2: '0' }).expect(422);

@@ -1,4 +1,5 @@
 import type { Job, JobHardware, JobLot } from '@hidewright/contract';
+import { useQueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
@@ -10,6 +11,7 @@ import { ApiProblem } from '../../../lib/api-problem.ts';
 import { countText, rackAreaText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
+import { jobQuery } from '../jobs.queries.ts';
 import { MixNotice } from './mix-notice.tsx';
 import { OffcutBack } from './offcut-back.tsx';
 import { TakeOther } from './take-other.tsx';
@@ -22,9 +24,17 @@ interface StockCardProps {
 /** Leather and hardware of a job: what is held for it, what it has taken, and one press to take what is held. */
 export function StockCard({ job, canTake }: StockCardProps) {
   const workshop = useWorkshop();
+  const client = useQueryClient();
   const { mutate, isPending, error: notTaken, variables } = useTakeForJob();
   const take = (body: Parameters<typeof mutate>[0]['body'], sentence: string) =>
-    mutate({ params: { id: job.id }, body }, { onSuccess: () => say(sentence) });
+    mutate(
+      { params: { id: job.id }, body },
+      {
+        onSuccess: () => say(sentence),
+        // It may be refused because somebody else took it: show what is held now.
+        onError: () => client.invalidateQueries(jobQuery(job.id)),
+      },
+    );
   const letting = useLetGo();
   const go = (body: Parameters<typeof letting.mutate>[0]['body'], what: string) =>
     letting.mutate(
@@ -73,7 +83,14 @@ export function StockCard({ job, canTake }: StockCardProps) {
                 className="text-base"
                 busy={busyWith('lotId', lot.lotId)}
                 onClick={() =>
-                  take({ lotId: lot.lotId, areaMm2: lot.heldAreaMm2 }, `Taken from lot ${lot.tag}.`)
+                  take(
+                    {
+                      lotId: lot.lotId,
+                      areaMm2: lot.heldAreaMm2,
+                      heldSeenAreaMm2: lot.heldAreaMm2,
+                    },
+                    `Taken from lot ${lot.tag}.`,
+                  )
                 }
               >
                 Take {rackAreaText(lot.heldAreaMm2, workshop)}
@@ -114,7 +131,11 @@ export function StockCard({ job, canTake }: StockCardProps) {
                   busy={busyWith('hardwareId', item.hardwareId)}
                   onClick={() =>
                     take(
-                      { hardwareId: item.hardwareId, quantity: item.held },
+                      {
+                        hardwareId: item.hardwareId,
+                        quantity: item.held,
+                        heldSeenQuantity: item.held,
+                      },
                       `Taken: ${item.held} ${item.name}.`,
                     )
                   }
