@@ -99,12 +99,21 @@ export const listCounts = endpoint({
   reply: page(countCard),
 });
 
+const countPlace = z.object({
+  /** '' for lots of which nobody said where they lie. */
+  place: z.string(),
+  lots: z.int(),
+  /** Kinds of hardware and supplies that have their bin there. */
+  bins: z.int(),
+});
+export type CountPlace = z.infer<typeof countPlace>;
+
 export const listCountPlaces = endpoint({
   method: 'GET',
   path: '/count-places',
-  summary: 'The places where lots lie, with how many lie there',
+  summary: 'The places where lots lie or bins stand, with how many of each',
   access: stockroom,
-  reply: z.object({ items: z.array(z.object({ place: z.string(), lots: z.int() })) }),
+  reply: z.object({ items: z.array(countPlace) }),
 });
 
 export const openCount = endpoint({

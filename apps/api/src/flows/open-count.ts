@@ -1,6 +1,7 @@
 import type { BodyOf, openCount as endpoint } from '@hidewright/contract';
 import { invalid } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
+import { countedHardware } from '../modules/counts/counted-hardware.ts';
 import { CountLine } from '../modules/counts/count-line.entity.ts';
 import { StockCount } from '../modules/counts/stock-count.entity.ts';
 import { Leather } from '../modules/leathers/leather.entity.ts';
@@ -56,26 +57,25 @@ async function shelfOf(work: Work, asked: Asked): Promise<Shelf> {
   if (asked.of === 'place') return placeShelf(work, asked.place);
   if (asked.of === 'leather') return leatherShelf(work, asked.leatherId);
   const kind = asked.of;
-  const rows = await work.em.execute<{ id: number }[]>(
-    `SELECT h.id FROM hardware h LEFT JOIN stock_balance b ON b.hardware_id = h.id
-     WHERE h.kind = ? AND (h.active = 1 OR b.on_hand > 0) ORDER BY h.name`,
-    [kind],
-  );
   return {
     title: kind === 'hardware' ? 'All hardware' : 'All supplies',
     place: null,
     leatherId: null,
-    items: rows.map(({ id }) => ({ hardwareId: id })),
+    items: await hardwareWhere(work, 'h.kind = ?', kind),
     empty: { field: 'of', message: `There are no ${kind} yet. Add some first.` },
   };
 }
 
+/** Lots and hardware that lie there; hardware whose place nobody said is counted with all hardware. */
 async function placeShelf(work: Work, place: string): Promise<Shelf> {
   return {
     title: place === '' ? 'Lots without a place' : place,
     place,
     leatherId: null,
-    items: await lotsWhere(work, 'lot.place = ?', place),
+    items: [
+      ...(await lotsWhere(work, 'lot.place = ?', place)),
+      ...(place === '' ? [] : await hardwareWhere(work, 'h.bin = ?', place)),
+    ],
     empty: { field: 'place', message: 'Nothing lies there by the books. Choose another place.' },
   };
 }
@@ -103,4 +103,12 @@ async function lotsWhere(work: Work, sql: string, value: string | number): Promi
     [value],
   );
   return rows.map(({ id }) => ({ lotId: id }));
+}
+
+async function hardwareWhere(work: Work, sql: string, value: string): Promise<StockItem[]> {
+  const rows = await work.em.execute<{ id: number }[]>(
+    `SELECT h.id FROM ${countedHardware} AND ${sql} ORDER BY h.bin, h.name`,
+    [value],
+  );
+  return rows.map(({ id }) => ({ hardwareId: id }));
 }

@@ -30,7 +30,7 @@ interface Row {
   tag: string | null;
   name: string;
   form: string | null;
-  place: string | null;
+  place: string;
   added: number;
   counted: number | null;
   book: number | null;
@@ -43,7 +43,7 @@ interface Row {
   posted: number | null;
 }
 
-const sql = `SELECT l.*, lot.tag, lot.form, lot.place, COALESCE(leather.name, h.name) AS name,
+const sql = `SELECT l.*, lot.tag, lot.form, COALESCE(lot.place, h.bin, '') AS place, COALESCE(leather.name, h.name) AS name,
     COALESCE(b.on_hand, 0) AS on_hand, COALESCE(b.reserved, 0) AS reserved, m.value AS posted
   FROM count_line l
   LEFT JOIN lot ON lot.id = l.lot_id
@@ -51,9 +51,9 @@ const sql = `SELECT l.*, lot.tag, lot.form, lot.place, COALESCE(leather.name, h.
   LEFT JOIN hardware h ON h.id = l.hardware_id
   LEFT JOIN stock_balance b ON b.lot_id IS l.lot_id AND b.hardware_id IS l.hardware_id
   LEFT JOIN stock_movement m ON m.id = l.movement_id
-  WHERE l.count_id = ? ORDER BY lot.place, lot.tag, h.name, l.id`;
+  WHERE l.count_id = ? ORDER BY COALESCE(lot.place, h.bin, '') = '', place, l.lot_id IS NULL, lot.tag, h.name, l.id`;
 
-/** A sheet's lines as they hang: by place and tag, hardware by name. */
+/** A sheet's lines as one goes along: by place, there lots by tag and hardware by name; last what has no place. */
 export async function readSheetLines(em: EntityManager, countId: number): Promise<SheetLine[]> {
   const rows = await em.execute<Row[]>(sql, [countId]);
   return rows.map((row) => ({
@@ -63,7 +63,7 @@ export async function readSheetLines(em: EntityManager, countId: number): Promis
     tag: row.tag ?? binTag(row.hardware_id ?? 0),
     name: row.name,
     form: row.form,
-    place: row.place ?? '',
+    place: row.place,
     added: row.added === 1,
     counted: row.counted,
     book: row.book,

@@ -252,8 +252,53 @@ describe('a count', () => {
     const { body } = await open({ of: 'leather', leatherId: things.leatherId }).expect(201);
     expect(body.lines.length).toBeGreaterThan(5);
     const places = await shop.as('maker').get('/api/count-places').expect(200);
-    expect(places.body.items).toContainEqual({ place: 'Rack 1', lots: 2 });
+    expect(places.body.items).toContainEqual({ place: 'Rack 1', lots: 2, bins: 0 });
     const { body: list } = await shop.as('owner').get('/api/counts').expect(200);
     expect(list.items[0]).toMatchObject({ id: body.id, state: 'open' });
+  });
+
+  it('takes the bins of a place with its lots, and goes along all hardware by place', async () => {
+    const add = async (hardware: object) =>
+      (await shop.as('owner').post('/api/hardware').send(hardware).expect(201)).body.id as number;
+    const far = await add({ name: 'A far snap', unitPrice: '0.20', bin: 'Zinc drawer' });
+    const near = await add({ name: 'Near snap', unitPrice: '0.20', bin: 'Beech drawer' });
+    const dye = await add({
+      name: 'Dye',
+      kind: 'supplies',
+      unitPrice: '4.00',
+      bin: 'Beech drawer',
+    });
+    const none = await add({ name: 'A stray snap', unitPrice: '0.20' });
+    const parts = [{ hardwareId: near, quantity: 2 }];
+    const kit = await add({ name: 'Pair of snaps', unitPrice: '0.40', bin: 'Beech drawer', parts });
+    const lot = { leatherId: things.leatherId, form: 'side', measuredAreaMm2: ft2(9) };
+    const lots = [{ ...lot, place: 'Beech drawer' }];
+    await shop.as('owner').post('/api/receipts').send({ lots }).expect(201);
+    const places = (await shop.as('maker').get('/api/count-places').expect(200)).body.items;
+    expect(places).toContainEqual({ place: 'Beech drawer', lots: 1, bins: 2 });
+    expect(places).toContainEqual({ place: 'Zinc drawer', lots: 0, bins: 1 });
+
+    const open = async (body: object) =>
+      (await shop.as('maker').post('/api/counts').send(body).expect(201)).body;
+    const sheet = await open({ of: 'place', place: 'Beech drawer' });
+    expect(sheet.lines).toMatchObject([
+      { lotId: expect.any(Number), place: 'Beech drawer' },
+      { hardwareId: dye, place: 'Beech drawer' },
+      { hardwareId: near, place: 'Beech drawer' },
+    ]);
+    await enter(sheet.id, sheet.lines[2], { quantity: 12 }).expect(200);
+    await handIn(sheet.id, true).expect(201);
+    await approve(sheet.id).expect(201);
+    const { body: counted } = await shop.as('owner').get(`/api/hardware/${near}`).expect(200);
+    expect(counted).toMatchObject({ onHand: 12, bin: 'Beech drawer' });
+
+    const all = (await open({ of: 'hardware' })).lines as Line[];
+    const order = all.map(({ hardwareId }) => hardwareId);
+    expect(order.slice(0, 2)).toEqual([near, far]);
+    expect(order).toContain(none);
+    expect(order).not.toContain(kit);
+    expect(order).not.toContain(dye);
+    const stray = await open({ of: 'place', place: 'Zinc drawer' });
+    expect(stray.lines).toMatchObject([{ hardwareId: far }]);
   });
 });

@@ -1,6 +1,7 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
-import type { CountCard, CountState } from '@hidewright/contract';
+import type { CountCard, CountPlace, CountState } from '@hidewright/contract';
 import { when, whereAll } from '../../db/sql-conditions.ts';
+import { countedHardware } from './counted-hardware.ts';
 
 interface Row {
   id: number;
@@ -51,10 +52,14 @@ export async function readCountCards(
   }));
 }
 
-/** Where lots lie, with how many. */
-export async function readPlaces(em: EntityManager): Promise<{ place: string; lots: number }[]> {
+/** Where lots lie and hardware has its bin, with how many of each. */
+export async function readPlaces(em: EntityManager): Promise<CountPlace[]> {
   return em.execute(
-    `SELECT lot.place, COUNT(*) AS lots FROM lot JOIN stock_balance b ON b.lot_id = lot.id
-     WHERE b.on_hand > 0 GROUP BY lot.place ORDER BY lot.place`,
+    `SELECT place, SUM(lots) AS lots, SUM(bins) AS bins FROM (
+       SELECT lot.place, COUNT(*) AS lots, 0 AS bins FROM lot JOIN stock_balance b ON b.lot_id = lot.id
+       WHERE b.on_hand > 0 GROUP BY lot.place
+       UNION ALL
+       SELECT h.bin, 0, COUNT(*) FROM ${countedHardware} AND h.bin <> '' GROUP BY h.bin)
+     GROUP BY place ORDER BY place`,
   );
 }

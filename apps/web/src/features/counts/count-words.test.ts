@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { countedText, figureOf, readEntry } from './count-words.ts';
+import { countedText, figureOf, readEntry, whatLies } from './count-words.ts';
 
 const blank = { lotId: 1, countedAreaMm2: null, countedQuantity: null, unmeasured: false };
 
@@ -26,5 +26,13 @@ describe('what is typed while counting', () => {
     expect(figureOf(blank, 'ft2')).toBe('');
     expect(countedText(blank, 'ft2')).toBe('not counted');
     expect(countedText({ ...blank, unmeasured: true }, 'ft2')).toBe('hangs there, not measured');
+  });
+});
+
+describe('what there is to count at a place', () => {
+  it('is lots, bins, or both', () => {
+    expect(whatLies(1, 0)).toBe('1 lot');
+    expect(whatLies(0, 1)).toBe('1 bin');
+    expect(whatLies(3, 12)).toBe('3 lots, 12 bins');
   });
 });

@@ -33,6 +33,15 @@ export function countedText(line: Counted, unit: AreaUnit): string {
   return quantityText(line.countedAreaMm2, line.countedQuantity, unit) ?? 'not counted';
 }
 
+/** "2 lots, 1 bin": what there is to count at a place. */
+export function whatLies(lots: number, bins: number): string {
+  const parts = [
+    lots > 0 && (lots === 1 ? '1 lot' : `${lots} lots`),
+    bins > 0 && (bins === 1 ? '1 bin' : `${bins} bins`),
+  ];
+  return parts.filter(Boolean).join(', ');
+}
+
 export function quantityText(
   areaMm2: string | null | undefined,
   quantity: number | null | undefined,

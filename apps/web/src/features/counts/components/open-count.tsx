@@ -6,6 +6,7 @@ import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { SelectInput } from '../../../components/select-input.tsx';
+import { whatLies } from '../count-words.ts';
 import { useOpenCount } from '../counts.mutations.ts';
 import { countPlacesQuery } from '../counts.queries.ts';
 
@@ -15,7 +16,7 @@ interface OpenCountProps {
   leathers: readonly { value: string | number; label: string }[];
 }
 
-/** What to count: a place on the rack, a leather wherever it hangs, or what stands in bins. */
+/** What to count: a place with its lots and bins, a leather wherever it hangs, or all that stands in bins. */
 export function OpenCount({ leathers }: OpenCountProps) {
   const { data: places } = useSuspenseQuery(countPlacesQuery());
   const open = useOpenCount();
@@ -34,7 +35,7 @@ export function OpenCount({ leathers }: OpenCountProps) {
           <fieldset>
             <legend className="mb-1.5 font-semibold">A place</legend>
             <div className="flex flex-wrap gap-2">
-              {places.items.map(({ place, lots }) => (
+              {places.items.map(({ place, lots, bins }) => (
                 <Button
                   key={place}
                   className="min-h-11"
@@ -42,16 +43,14 @@ export function OpenCount({ leathers }: OpenCountProps) {
                   onClick={() => start({ of: 'place', place })}
                 >
                   {place === '' ? 'No place' : place}
-                  <span className="font-normal text-ink-soft">
-                    {lots === 1 ? '1 lot' : `${lots} lots`}
-                  </span>
+                  <span className="font-normal text-ink-soft">{whatLies(lots, bins)}</span>
                 </Button>
               ))}
             </div>
           </fieldset>
         )}
         <fieldset>
-          <legend className="mb-1.5 font-semibold">Bins</legend>
+          <legend className="mb-1.5 font-semibold">All bins</legend>
           <div className="flex flex-wrap gap-2">
             {(['hardware', 'supplies'] as const).map((of) => (
               <Button key={of} className="min-h-11" onClick={() => start({ of })}>
