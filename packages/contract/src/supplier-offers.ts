@@ -83,9 +83,7 @@ export const listSupplierOffers = endpoint({
   path: '/supplier-offers',
   summary: 'Who sells a leather or a hardware at which prices, the preferred one first',
   access: everybody,
-  query: pageQuery
-    .omit({ q: true, cursor: true })
-    .extend({ leatherId: ids, hardwareId: ids, supplierId: ids }),
+  query: pageQuery.omit({ q: true }).extend({ leatherId: ids, hardwareId: ids, supplierId: ids }),
   reply: page(supplierOffer),
 });
 

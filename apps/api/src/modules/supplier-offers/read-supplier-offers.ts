@@ -12,6 +12,8 @@ interface Asked {
   supplierId?: number | undefined;
   /** Any of these. */
   of?: { leatherIds: readonly number[]; hardwareIds: readonly number[] } | undefined;
+  /** Those that come after this one. */
+  after?: number | undefined;
   limit?: number;
 }
 
@@ -40,6 +42,9 @@ const offered = `
 const ofAny = `o.leather_id IN (SELECT value FROM json_each(?, '$.leatherIds'))
   OR o.hardware_id IN (SELECT value FROM json_each(?, '$.hardwareIds'))`;
 
+/** Of the list, which has the preferred first. */
+const later = `(-o.preferred, o.id) > (SELECT -preferred, id FROM supplier_offer WHERE id = ?)`;
+
 /** Offers for one thing or of one supplier, the preferred one of each thing first. */
 export async function readSupplierOffers(
   em: EntityManager,
@@ -50,6 +55,7 @@ export async function readSupplierOffers(
     ...when(asked.leatherId, 'o.leather_id = ?'),
     ...when(asked.hardwareId, 'o.hardware_id = ?'),
     ...when(asked.supplierId, 'o.supplier_id = ?'),
+    ...when(asked.after, later),
     ...when(asked.of && JSON.stringify(asked.of), ofAny, (json) => [json, json]),
   ]);
   const sql = `${offered} ${where} ORDER BY o.preferred DESC, o.id LIMIT ?`;

@@ -8,6 +8,7 @@ import {
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { requireVersion } from '../../http/conditions.ts';
+import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
 import { adoptOffer } from './adopt-supplier-offer.ts';
 import { readOneOffer, readSupplierOffers } from './read-supplier-offers.ts';
@@ -16,10 +17,12 @@ import { addOffer, changeOffer, findOffer, logOffer, thingOf } from './save-supp
 export function supplierOfferRoutes(context: Context): Router {
   const router = Router();
 
-  serve(router, context, listSupplierOffers, async ({ em }, { query }) => ({
-    items: await readSupplierOffers(em, query),
-    next: null,
-  }));
+  serve(router, context, listSupplierOffers, async ({ em }, { query }) => {
+    const { cursor, limit, ...asked } = query;
+    const after = readCursor(cursor);
+    const rows = await readSupplierOffers(em, { ...asked, after, limit: limit + 1 });
+    return toPage(rows, limit, ({ id }) => id);
+  });
 
   serve(router, context, addSupplierOffer, async (work, { body }) => {
     const { id } = await addOffer(work, body);

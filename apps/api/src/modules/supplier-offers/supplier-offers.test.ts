@@ -157,3 +157,28 @@ describe('offers of suppliers', () => {
     await offer({ supplierId, hardwareId: 999, breaks }).expect(422);
   });
 });
+
+describe('a list of offers', () => {
+  it('comes page by page, the preferred ones first, each once', async () => {
+    const made = await owner()
+      .post('/api/hardware')
+      .send({ name: 'Rings 25 mm', kind: 'hardware', unitPrice: '0.30' })
+      .expect(201);
+    const hardwareId: number = made.body.id;
+    for (const supplierId of [things.supplierId, second]) {
+      await offer({ supplierId, hardwareId, breaks: [{ from: '1', price: '0.3' }] }).expect(201);
+    }
+    const read = async (paging = '') => {
+      const { body } = await owner().get(`/api/supplier-offers?hardwareId=${hardwareId}${paging}`);
+      return body as { items: { id: number }[]; next: string | null };
+    };
+    const [early, late] = (await read()).items.map(({ id }) => id);
+    // Made preferred, the later one comes first, although its number is higher.
+    await owner().post(`/api/supplier-offers/${late}/adoptions`).expect(200);
+    const first = await read('&limit=1');
+    expect(first.items).toMatchObject([{ id: late }]);
+    const rest = await read(`&limit=1&cursor=${first.next}`);
+    expect(rest.items).toMatchObject([{ id: early }]);
+    expect(rest.next).toBeNull();
+  });
+});
