@@ -1,12 +1,13 @@
 import { listLeathers, readLeather } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
-/** The leathers, newest first; one page holds what a small shop buys. */
+/** All leathers, newest first. */
 export function leathersQuery() {
   return queryOptions({
     queryKey: ['leathers'],
-    queryFn: ({ signal }) => call(listLeathers, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listLeathers, { query: paging, signal })),
   });
 }
 

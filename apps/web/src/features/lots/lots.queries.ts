@@ -1,13 +1,7 @@
-import {
-  listLots,
-  readLot,
-  readLotDrawing,
-  readLotSearch,
-  type Lot,
-  type ReplyOf,
-} from '@hidewright/contract';
+import { listLots, readLot, readLotDrawing, readLotSearch } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 interface Wanted {
   leatherId?: number | undefined;
@@ -35,14 +29,10 @@ export function rackQuery() {
   return queryOptions({
     queryKey: ['lots', 'rack'],
     queryFn: async ({ signal }) => {
-      const lots: Lot[] = [];
-      for (let cursor: string | null = ''; cursor !== null;) {
-        const query = { onRack: 'yes' as const, limit: 200, ...(cursor && { cursor }) };
-        const page: ReplyOf<typeof listLots> = await call(listLots, { query, signal });
-        lots.push(...page.items);
-        cursor = page.next;
-      }
-      return lots;
+      const { items } = await everyPage((paging) =>
+        call(listLots, { query: { onRack: 'yes', ...paging }, signal }),
+      );
+      return items;
     },
   });
 }

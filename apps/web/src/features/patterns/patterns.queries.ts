@@ -8,6 +8,7 @@ import {
 } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 /** The patterns, newest first; one page holds what a small shop makes. */
 export function patternsQuery() {
@@ -31,20 +32,20 @@ export function patternVersionsQuery(id: number) {
   });
 }
 
-/** The leathers that a pattern can be made of. */
+/** All leathers that a pattern can be made of. */
 export function leatherChoicesQuery() {
   return queryOptions({
     queryKey: ['patterns', 'leather-choices'],
-    queryFn: ({ signal }) => call(listLeathers, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listLeathers, { query: paging, signal })),
     select: ({ items }) => items.filter((leather) => leather.active),
   });
 }
 
-/** The hardware and supplies that a pattern can take. */
+/** All hardware and supplies that a pattern can take. */
 export function hardwareChoicesQuery() {
   return queryOptions({
     queryKey: ['patterns', 'hardware-choices'],
-    queryFn: ({ signal }) => call(listHardware, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listHardware, { query: paging, signal })),
     select: ({ items }) => items.filter((hardware) => hardware.active),
   });
 }

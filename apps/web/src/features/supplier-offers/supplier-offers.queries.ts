@@ -1,13 +1,15 @@
 import { listSupplierOffers } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 export type OfferedThing = { leatherId: number } | { hardwareId: number };
 
-/** Who sells a leather or a hardware, or what a supplier sells; one page holds them all. */
+/** Everybody who sells a leather or a hardware, or all that a supplier sells. */
 export function supplierOffersQuery(asked: OfferedThing | { supplierId: number }) {
   return queryOptions({
     queryKey: ['supplier-offers', asked],
-    queryFn: ({ signal }) => call(listSupplierOffers, { query: { ...asked, limit: 200 }, signal }),
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listSupplierOffers, { query: { ...asked, ...paging }, signal })),
   });
 }

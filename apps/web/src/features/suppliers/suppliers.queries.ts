@@ -1,12 +1,13 @@
 import { listSuppliers, readSupplier } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
-/** The suppliers, newest first; one page holds those of a small shop. */
+/** All suppliers, newest first. */
 export function suppliersQuery() {
   return queryOptions({
     queryKey: ['suppliers'],
-    queryFn: ({ signal }) => call(listSuppliers, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listSuppliers, { query: paging, signal })),
   });
 }
 

@@ -7,6 +7,7 @@ import { KeyFigures } from '../../../components/key-figures.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { ChangeLeatherForm } from '../../../features/leathers/components/change-leather-form.tsx';
 import { leatherDetail } from '../../../features/leathers/leather-words.ts';
@@ -39,7 +40,7 @@ export function Component() {
   const { isOwner, handlesStock } = useRole();
   const { data: leather } = useSuspenseQuery(leatherQuery(id));
   const { data: suppliers } = useSuspenseQuery(suppliersQuery());
-  const { data: lots } = useInfiniteQuery(lotsQuery({ leatherId: id, onRack: 'yes' }));
+  const lots = useInfiniteQuery(lotsQuery({ leatherId: id, onRack: 'yes' }));
   const receive = handlesStock ? (
     <LinkButton to={`/stockroom/receive?leather=${id}`} tone={isOwner ? 'secondary' : 'primary'}>
       Receive a lot
@@ -73,12 +74,13 @@ export function Component() {
           aside={<TextLink to={`/stockroom/ledger?leather=${id}`}>What moved of it</TextLink>}
         >
           <LotsTable
-            rows={lots?.pages.flatMap((page) => page.items) ?? []}
+            rows={lots.data?.pages.flatMap((page) => page.items) ?? []}
             empty={
               <EmptyState title="None of it is on the rack." action={receive}>
                 A lot hangs here once it is received, with its tag and measured area.
               </EmptyState>
             }
+            after={<ShowEarlier pages={lots} what="lots" />}
           />
         </Card>
         <OffersCard

@@ -6,6 +6,7 @@ import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 import { PurchaseOrdersTable } from '../../../features/purchase-orders/components/purchase-orders-table.tsx';
 import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { SoldList } from '../../../features/supplier-offers/components/sold-list.tsx';
@@ -30,7 +31,7 @@ export function Component() {
   const { id } = useLoaderData<Supplier>();
   const { isOwner } = useRole();
   const { data: supplier } = useSuspenseQuery(supplierQuery(id));
-  const { data: orders } = useInfiniteQuery(purchaseOrdersQuery({ supplierId: id }));
+  const orders = useInfiniteQuery(purchaseOrdersQuery({ supplierId: id }));
   const order = isOwner ? (
     <LinkButton to={`/stockroom/purchase-orders/new?supplier=${id}`} tone="primary">
       New purchase order
@@ -51,8 +52,9 @@ export function Component() {
           <SoldList supplierId={id} />
           <Card title="Orders to them">
             <PurchaseOrdersTable
-              rows={orders?.pages.flatMap((page) => page.items) ?? []}
+              rows={orders.data?.pages.flatMap((page) => page.items) ?? []}
               empty={<EmptyState title="Nothing was ordered from them yet." action={order} />}
+              after={<ShowEarlier pages={orders} what="orders" />}
             />
           </Card>
         </div>

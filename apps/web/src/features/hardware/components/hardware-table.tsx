@@ -64,9 +64,11 @@ const basics: Column<Hardware>[] = [
 interface HardwareTableProps {
   rows: readonly Hardware[];
   empty: ReactNode;
+  /** Under the last row, such as a button for more. */
+  after?: ReactNode;
 }
 
-export function HardwareTable({ rows, empty }: HardwareTableProps) {
+export function HardwareTable({ rows, empty, after }: HardwareTableProps) {
   const { currency } = useWorkshop();
   const withPrices = rows.some((row) => row.unitPrice !== undefined);
   const columns = useMemo(
@@ -82,6 +84,7 @@ export function HardwareTable({ rows, empty }: HardwareTableProps) {
       empty={empty}
       filterLabel="Filter hardware and supplies"
       sortedBy={{ id: 'name' }}
+      after={after}
     />
   );
 }
