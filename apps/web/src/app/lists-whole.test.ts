@@ -7,6 +7,7 @@ import {
   hardwareChoicesQuery,
   leatherChoicesQuery,
 } from '../features/patterns/patterns.queries.ts';
+import { awaitedOrdersQuery } from '../features/purchase-orders/purchase-orders.queries.ts';
 import { supplierOffersQuery } from '../features/supplier-offers/supplier-offers.queries.ts';
 import { suppliersQuery } from '../features/suppliers/suppliers.queries.ts';
 
@@ -36,6 +37,7 @@ describe('what is chosen from', () => {
     ['leathers of a pattern', () => client().fetchQuery(leatherChoicesQuery())],
     ['suppliers', () => client().fetchQuery(suppliersQuery())],
     ['offers', () => client().fetchQuery(supplierOffersQuery({ supplierId: 7 }))],
+    ['awaited orders', () => client().fetchQuery(awaitedOrdersQuery())],
     ['the rack', async () => ({ items: await client().fetchQuery(rackQuery()) })],
   ])('has the oldest of %s too', async (_what, read) => {
     const { items } = await read();

@@ -8,11 +8,11 @@ import {
 } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 interface Wanted {
   state?: PurchaseOrderState | undefined;
   supplierId?: number | undefined;
-  awaited?: 'yes' | undefined;
 }
 
 /** Orders to suppliers, newest first, page by page. */
@@ -26,6 +26,17 @@ export function purchaseOrdersQuery(wanted: Wanted = {}) {
       }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
+  });
+}
+
+/** All orders of which something is still to come. */
+export function awaitedOrdersQuery() {
+  return queryOptions({
+    queryKey: ['purchase-orders', 'awaited'],
+    queryFn: ({ signal }) =>
+      everyPage((paging) =>
+        call(listPurchaseOrders, { query: { awaited: 'yes', ...paging }, signal }),
+      ),
   });
 }
 

@@ -1,5 +1,5 @@
 import type { PurchaseOrder, receiveDelivery, ReplyOf } from '@hidewright/contract';
-import { useQuery, useSuspenseInfiniteQuery, useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
 import { Button } from '../../../components/button.tsx';
@@ -11,8 +11,8 @@ import { hardwareListQuery } from '../../../features/hardware/hardware.queries.t
 import { workshopQuery } from '../../../features/office/office.queries.ts';
 import { leathersQuery } from '../../../features/leathers/leathers.queries.ts';
 import {
+  awaitedOrdersQuery,
   purchaseOrderQuery,
-  purchaseOrdersQuery,
 } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { AwaitedOrders } from '../../../features/receiving/components/awaited-orders.tsx';
 import { ReceiveForm } from '../../../features/receiving/components/receive-form.tsx';
@@ -32,7 +32,7 @@ export async function loader({ request }: LoaderFunctionArgs) {
   const orderId = Number(new URL(request.url).searchParams.get('order'));
   const [order] = await Promise.all([
     orderId > 0 ? queryClient.fetchQuery(purchaseOrderQuery(orderId)) : null,
-    queryClient.fetchInfiniteQuery(purchaseOrdersQuery({ awaited: 'yes' })),
+    queryClient.fetchQuery(awaitedOrdersQuery()),
     queryClient.ensureQueryData(workshopQuery()),
     queryClient.ensureQueryData(leathersQuery()),
     queryClient.ensureQueryData(hardwareListQuery()),
@@ -68,11 +68,10 @@ const saysWhat = (search: URLSearchParams) =>
   ['order', 'leather', 'hardware'].some((name) => search.has(name));
 
 function Choosing() {
-  const { data } = useSuspenseInfiniteQuery(purchaseOrdersQuery({ awaited: 'yes' }));
-  const orders = data.pages.flatMap((page) => page.items);
+  const { data } = useSuspenseQuery(awaitedOrdersQuery());
   // Those without a day come last.
   const day = (order: PurchaseOrder) => order.awaitedOn ?? '9999-12-31';
-  return <AwaitedOrders orders={[...orders].sort((a, b) => day(a).localeCompare(day(b)))} />;
+  return <AwaitedOrders orders={[...data.items].sort((a, b) => day(a).localeCompare(day(b)))} />;
 }
 
 interface ReceivingProps {
