@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bestBuy, type BuyOffer } from './best-buy.ts';
+import { bestBuy, type BuyOffer, priceReached } from './best-buy.ts';
 import { offerFaults } from './supplier-offer.ts';
 
 const offer = (id: number, rest: Partial<BuyOffer>): BuyOffer => ({
@@ -38,6 +38,15 @@ describe('what buying really costs', () => {
   ])('going from %s to the next break costs %s more: %s', (needed, dearerBy, worth) => {
     const [best] = bestBuy({ needed, offers: [offer(1, { breaks: ladder })] });
     expect(best?.next).toMatchObject({ dearerBy, worth });
+  });
+
+  it.each([
+    ['0', '0.2'],
+    ['199', '0.2'],
+    ['200', '0.15'],
+    ['5000', '0.15'],
+  ])('%s reach the price of %s', (quantity, price) => {
+    expect(priceReached(offer(1, { minimum: '500', breaks: ladder }), quantity)).toBe(price);
   });
 
   it('prices leather by the ft² for an area in mm²', () => {

@@ -97,9 +97,24 @@ function soldQuantity({ minimum, multiple }: CheckedOffer, wanted: Decimal): Dec
   return multiple === null ? least : least.div(multiple).ceil().times(multiple);
 }
 
-function buy({ breaks }: CheckedOffer, quantity: Decimal, per: Decimal): Buying {
-  const reached = breaks.findLast(({ from }) => from.lte(quantity)) ?? breaks[0];
-  const price = reached?.price ?? new Exact(0);
+/**
+ * The price of one priced unit that a quantity reaches, even where so much is not sold; below the first break the
+ * first price holds.
+ * @param quantity in the unit that is counted, 0 or more
+ * @throws InvalidInput
+ */
+export function priceReached(terms: OfferTerms, quantity: DecimalText): DecimalText {
+  const much = readDecimal(quantity, 'quantity', { min: 0, max: '1000000000000' });
+  return toText(reached(checkOffer(terms), much));
+}
+
+function reached({ breaks }: CheckedOffer, quantity: Decimal): Decimal {
+  const step = breaks.findLast(({ from }) => from.lte(quantity)) ?? breaks[0];
+  return step?.price ?? new Exact(0);
+}
+
+function buy(offer: CheckedOffer, quantity: Decimal, per: Decimal): Buying {
+  const price = reached(offer, quantity);
   const cost = toPlaces(quantity.times(price).div(per), 2);
   return { quantity: toText(quantity), price: toText(price), cost };
 }
