@@ -19,10 +19,21 @@ interface Named {
   items: { id: number; name: string }[];
 }
 
-async function goTo(page: Page, room: string, list: string, name: string): Promise<void> {
+async function idOf(page: Page, list: string, name: string): Promise<number | undefined> {
   const read = await page.request.get(`${hidewright.url}/api/${list}?limit=200`);
-  const found = ((await read.json()) as Named).items.find((each) => each.name === name);
-  await visit(page, `${hidewright.url}/${room}/${found?.id}`);
+  return ((await read.json()) as Named).items.find((each) => each.name === name)?.id;
+}
+
+async function goTo(page: Page, room: string, list: string, name: string): Promise<void> {
+  await visit(page, `${hidewright.url}/${room}/${await idOf(page, list, name)}`);
+}
+
+async function post(page: Page, list: string, key: string, data: object): Promise<void> {
+  const made = await page.request.post(`${hidewright.url}/api/${list}`, {
+    headers: { 'Idempotency-Key': key, origin: hidewright.url },
+    data,
+  });
+  expect(made.status()).toBe(201);
 }
 
 walk(
@@ -128,4 +139,73 @@ walk('a bin is weighed', async ({ page }) => {
   await page.getByRole('button', { name: 'Set it' }).click();
   await page.getByText('Adjusted by −30.').first().waitFor();
   expect(await page.getByText(/USD/).count()).toBe(0);
+});
+
+const rings = 'Split rings 30 mm, nickel';
+
+walk('a typed order takes the price that its quantity reaches', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'owner');
+  await post(page, 'hardware', 'typed-order-walk-1', { name: rings, unitPrice: '0.21' });
+  await post(page, 'supplier-offers', 'typed-order-walk-2', {
+    supplierId: await idOf(page, 'suppliers', 'Fennbridge Fittings'),
+    hardwareId: await idOf(page, 'hardware', rings),
+    ...{ minimum: '100', multiple: '50' },
+    breaks: [
+      { from: '100', price: '0.17' },
+      { from: '500', price: '0.14' },
+    ],
+  });
+  await visit(page, `${hidewright.url}/stockroom/purchase-orders/new`);
+  const supplier = page.getByLabel('Supplier', { exact: true });
+  const price = page.getByLabel('Price', { exact: true });
+  const many = page.getByLabel('How many');
+  await supplier.selectOption({ label: 'Straightedge Dies' });
+  await page.getByRole('button', { name: 'Hardware or supplies' }).click();
+  await page.getByLabel('Hardware or supplies', { exact: true }).selectOption({ label: rings });
+  await expect.poll(() => price.inputValue()).toBe('0.21');
+
+  await supplier.selectOption({ label: 'Fennbridge Fittings' });
+  await expect.poll(() => price.inputValue()).toBe('0.17');
+  await many.fill('30');
+  await page.getByText('Sold from 100 in packs of 50: order 100.').waitFor();
+  await many.fill('450');
+  await page.getByText('From 500 they cost 0.14 each: 500 cost 6.50 less than 450.').waitFor();
+  await expectAccessible(page);
+  await page.setViewportSize(phone);
+  await settled(page);
+  await expectNoOverflow(page);
+  await many.fill('500');
+  await expect.poll(() => price.inputValue()).toBe('0.14');
+  await page.getByText(/Together USD 70.00/).waitFor();
+
+  await price.fill('0.13');
+  await many.fill('450');
+  await page.getByText(/Together USD 58.50/).waitFor();
+  expect(await price.inputValue(), 'a typed price stays').toBe('0.13');
+  await page.getByRole('button', { name: 'Save the draft' }).click();
+  await page
+    .getByText(/is drafted/)
+    .first()
+    .waitFor();
+  await page.getByRole('link', { name: 'Change', exact: true }).click();
+  await settled(page);
+  expect(await price.inputValue(), 'a draft is opened as it was saved').toBe('0.13');
+});
+
+walk('the oldest of more than one page of hardware can be named and seen', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'owner');
+  const oldest = 'Rivet caps 7 mm, nickel';
+  const id = await idOf(page, 'hardware', oldest);
+  for (let at = 1; at <= 200; at += 1) {
+    await post(page, 'hardware', `many-${at}`, { name: `Tack ${at}`, unitPrice: '0.02' });
+  }
+  await visit(page, `${hidewright.url}/stockroom/hardware`);
+  const shown = page.getByRole('link', { name: oldest, exact: true });
+  expect(await shown.count()).toBe(0);
+  await page.getByRole('button', { name: 'Show earlier hardware and supplies' }).click();
+  await shown.waitFor();
+  expect(await page.getByRole('button', { name: /^Show earlier/ }).count()).toBe(0);
+  await visit(page, `${hidewright.url}/stockroom/purchase-orders/new?hardware=${id}`);
+  const chosen = page.getByLabel('Hardware or supplies', { exact: true });
+  expect(await chosen.locator('option:checked').textContent()).toBe(oldest);
 });

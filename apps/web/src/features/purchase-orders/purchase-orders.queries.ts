@@ -2,6 +2,7 @@ import {
   listClaims,
   listPurchaseOrders,
   listReceipts,
+  listSupplierOffers,
   listSupplierReturns,
   readPurchaseOrder,
   type PurchaseOrderState,
@@ -37,6 +38,16 @@ export function awaitedOrdersQuery() {
       everyPage((paging) =>
         call(listPurchaseOrders, { query: { awaited: 'yes', ...paging }, signal }),
       ),
+  });
+}
+
+/** All that a supplier sells, as far as it was entered. */
+export function soldByQuery(supplierId: number) {
+  return queryOptions({
+    queryKey: ['purchase-orders', 'sold-by', supplierId],
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listSupplierOffers, { query: { supplierId, ...paging }, signal })),
+    enabled: supplierId > 0,
   });
 }
 

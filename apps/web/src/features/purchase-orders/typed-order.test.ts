@@ -17,12 +17,12 @@ describe('an order as it is typed', () => {
     ).toBe('0.00');
   });
 
-  it('begins with a pack and the last price of what was chosen', () => {
+  it('begins with a pack of what was chosen, and its price still open', () => {
     expect(blankLine('hardware', { id: 7, name: 'Rivet', price: '0.17', packSize: 500 })).toEqual({
       of: 'hardware',
       hardwareId: 7,
       quantity: 500,
-      unitPrice: '0.17',
+      unitPrice: '',
     });
   });
 });

@@ -25,9 +25,9 @@ export const blankOrder: Partial<TypedOrder> = { expectedOn: null, note: '', lin
 
 const empty = '' as unknown as number;
 
-/** A line with its fields still to be filled in, or with something chosen already. */
+/** A line with its fields still to be filled in, or with something chosen already; its price follows from both. */
 export function blankLine(of: 'leather' | 'hardware', goods?: Goods): TypedLine {
-  const unitPrice = goods?.price ?? '';
+  const unitPrice = '';
   return of === 'leather'
     ? { of, leatherId: goods?.id ?? empty, areaMm2: '', unitPrice }
     : { of, hardwareId: goods?.id ?? empty, quantity: goods?.packSize ?? empty, unitPrice };

@@ -1,26 +1,36 @@
 import { X } from 'lucide-react';
-import { useEffect } from 'react';
-import { useFormContext, useWatch } from 'react-hook-form';
+import type { SupplierOfferReply } from '@hidewright/contract';
+import { useWatch } from 'react-hook-form';
 import { AreaField } from '../../../components/area-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
+import { useWorkshop } from '../../../lib/workshop.tsx';
+import { offeredPrice, termsOf, termsText, type LineTerms } from '../line-terms.ts';
 import type { Goods } from '../typed-order.ts';
+import { useOfferedPrice } from '../use-offered-price.ts';
 
 interface OrderLineProps {
   at: number;
   of: 'leather' | 'hardware';
   goods: readonly Goods[];
+  /** What the chosen supplier sells; undefined while it is being asked for. */
+  offers: readonly SupplierOfferReply[] | undefined;
   onRemove: () => void;
 }
 
-/** One line: what, how much of it, at which price; its last price is there as soon as it is chosen. */
-export function OrderLine({ at, of, goods, onRemove }: OrderLineProps) {
+/** One line: what, how much of it, at which price; what the supplier asks is there as soon as both are chosen. */
+export function OrderLine({ at, of, goods, offers, onRemove }: OrderLineProps) {
   const line = `lines.${at}`;
   const what = of === 'leather' ? `${line}.leatherId` : `${line}.hardwareId`;
-  const chosen = useChosen(what, `${line}.unitPrice`, goods);
+  const much = of === 'leather' ? `${line}.areaMm2` : `${line}.quantity`;
+  const { chosen, terms } = useChosen(
+    { of, what, much, price: `${line}.unitPrice` },
+    goods,
+    offers,
+  );
   const packs =
-    chosen?.packSize === undefined || chosen.packSize === 1
+    terms !== undefined || chosen?.packSize === undefined || chosen.packSize === 1
       ? undefined
       : `in packs of ${chosen.packSize}`;
   return (
@@ -34,9 +44,9 @@ export function OrderLine({ at, of, goods, onRemove }: OrderLineProps) {
         />
       </div>
       {of === 'leather' ? (
-        <AreaField name={`${line}.areaMm2`} label="Area" help="24.75 or 24³" />
+        <AreaField name={much} label="Area" help="24.75 or 24³" />
       ) : (
-        <NumberField name={`${line}.quantity`} label="How many" help={packs} />
+        <NumberField name={much} label="How many" help={packs} />
       )}
       <MoneyField
         name={`${line}.unitPrice`}
@@ -51,19 +61,36 @@ export function OrderLine({ at, of, goods, onRemove }: OrderLineProps) {
       >
         <X size={18} aria-hidden="true" />
       </button>
+      <p role="status" className="basis-full text-sm text-ink-soft empty:hidden">
+        {terms && <TermsRemark terms={terms} much={much} price={`${line}.unitPrice`} />}
+      </p>
     </div>
   );
 }
 
-/** What is chosen; its price goes into the price field while that is empty. */
-function useChosen(what: string, price: string, goods: readonly Goods[]): Goods | undefined {
-  const { getValues, setValue } = useFormContext();
-  const id: unknown = useWatch({ name: what });
+interface Fields {
+  of: 'leather' | 'hardware';
+  what: string;
+  much: string;
+  price: string;
+}
+
+/** What is chosen, on which terms; the price follows the supplier's, or else the last one. */
+function useChosen(
+  { of, what, much, price }: Fields,
+  goods: readonly Goods[],
+  offers: OrderLineProps['offers'],
+) {
+  const [id, quantity] = useWatch({ name: [what, much] }) as unknown[];
   const chosen = goods.find((item) => String(item.id) === String(id));
-  const known = chosen?.price;
-  useEffect(() => {
-    if (known !== undefined && getValues(price) === '')
-      setValue(price, known, { shouldDirty: true });
-  }, [known, price, getValues, setValue]);
-  return chosen;
+  const terms = chosen && offers && termsOf(offers, of, chosen.id);
+  const known = terms ? offeredPrice(terms, quantity) : chosen?.price;
+  useOfferedPrice(price, offers === undefined ? undefined : known);
+  return { chosen, terms };
+}
+
+function TermsRemark({ terms, much, price }: { terms: LineTerms; much: string; price: string }) {
+  const workshop = useWorkshop();
+  const [quantity, typed] = useWatch({ name: [much, price] }) as unknown[];
+  return termsText(terms, quantity, String(typed ?? ''), workshop);
 }

@@ -1,8 +1,11 @@
+import { useQuery } from '@tanstack/react-query';
 import { Plus } from 'lucide-react';
+import { useMemo } from 'react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
+import { soldByQuery } from '../purchase-orders.queries.ts';
 import {
   amountOf,
   blankLine,
@@ -25,6 +28,7 @@ interface OrderLinesProps {
 export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
   const { fields, append, remove } = useFieldArray<{ lines: TypedLine[] }>({ name: 'lines' });
   const { currency } = useWorkshop();
+  const offers = useOffers();
   const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
   const add = (of: 'leather' | 'hardware') =>
     append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
@@ -47,6 +51,7 @@ export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
               at={at}
               of={field.of}
               goods={field.of === 'leather' ? leathers : hardware}
+              offers={offers}
               onRemove={() => remove(at)}
             />
           ),
@@ -74,4 +79,11 @@ export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
       </p>
     </fieldset>
   );
+}
+
+/** What the chosen supplier sells: undefined while it is being asked for, nothing where nobody is chosen. */
+function useOffers() {
+  const supplierId = Number(useWatch({ name: 'supplierId' }) ?? 0);
+  const { data, isLoading } = useQuery(soldByQuery(supplierId > 0 ? supplierId : 0));
+  return useMemo(() => data?.items ?? (isLoading ? undefined : []), [data, isLoading]);
 }
