@@ -182,3 +182,34 @@ walk(
     await expectNoOverflow(page);
   },
 );
+
+walk('what came without an order is listed, and what it cost is put right', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'owner');
+  await visit(page, `${hidewright.url}/stockroom/receive?order=none`);
+  await page.getByRole('button', { name: 'A lot of leather' }).click();
+  const lot = page.getByRole('group', { name: 'Lot 1', exact: true });
+  await lot
+    .getByLabel('Leather', { exact: true })
+    .selectOption({ label: 'Oak tan natural 7–8 oz' });
+  await lot.getByLabel(/^Marked area/).fill('25');
+  await lot.getByLabel('Measured area').fill('20');
+  const shortfall = lot.getByText(/^It misses 5 ft²/);
+  await shortfall.waitFor();
+  expect(await shortfall.textContent()).not.toContain('claim');
+  await lot.getByLabel(/^Tag/).fill('MKT-1');
+  await page.getByRole('button', { name: 'Put it on the rack' }).click();
+  await page.getByRole('link', { name: 'To the delivery' }).click();
+  await page.waitForURL('**/stockroom/deliveries');
+  const card = page.getByRole('region').filter({ hasText: 'MKT-1' }).first();
+  await card.getByText('One lot is short of its mark.').waitFor();
+  expect(await card.getByRole('button', { name: 'Claim it' }).count()).toBe(0);
+  await card.getByRole('button', { name: 'Put right what it cost' }).click();
+  const costs = page.getByRole('dialog');
+  await costs.getByLabel(/^Freight/).fill('7.50');
+  await costs.getByRole('button', { name: 'Save the cost' }).click();
+  await page.getByText(/freight 7.50, shared out by value/).waitFor();
+  await expectAccessible(page);
+  await page.setViewportSize(phone);
+  await settled(page);
+  await expectNoOverflow(page);
+});

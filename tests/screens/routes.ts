@@ -42,6 +42,7 @@ const byRole: Record<Role, Screen[]> = {
     { name: 'purchase-orders', path: '/stockroom/purchase-orders' },
     { name: 'purchase-order-new', path: '/stockroom/purchase-orders/new' },
     { name: 'receive', path: '/stockroom/receive' },
+    { name: 'deliveries', path: '/stockroom/deliveries' },
     { name: 'scan', path: '/stockroom/scan' },
     { name: 'counts', path: '/stockroom/counts' },
     { name: 'tags', path: '/stockroom/tags' },

@@ -80,9 +80,11 @@ export const listReceipts = endpoint({
   path: '/receipts',
   summary: 'Deliveries that were received, newest first',
   access: everybody,
-  query: pageQuery
-    .omit({ q: true })
-    .extend({ purchaseOrderId: z.coerce.number().int().positive().optional() }),
+  query: pageQuery.omit({ q: true }).extend({
+    purchaseOrderId: z.coerce.number().int().positive().optional(),
+    /** Only those that came without an order. */
+    withoutOrder: z.literal('yes').optional(),
+  }),
   reply: page(receipt),
 });
 

@@ -11,7 +11,7 @@ import { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { receiveStock, undoReceipt } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
 import { carriageOf } from './receive/price-delivery.ts';
-import { batchWords } from './receive/put-on-rack.ts';
+import { cameWith } from './receive/put-on-rack.ts';
 
 type Correction = BodyOf<typeof changeReceipt>;
 
@@ -90,10 +90,11 @@ function shareOut(receipt: Receipt, lines: ReceiptLine[]): void {
   });
 }
 
-async function putBack(work: Work, { purchaseOrderId }: Receipt, line: ReceiptLine) {
+async function putBack(work: Work, receipt: Receipt, line: ReceiptLine) {
   const value = line.goods.plus(line.carriage).plus(line.material);
-  const reason = [batchWords(line.batch), 'cost put right'].filter(Boolean).join(', ');
+  const reason = [cameWith(receipt, line.batch), 'cost put right'].filter(Boolean).join(', ');
   const { quantity } = line;
+  const { purchaseOrderId } = receipt;
   if (line.lotId !== null) (await findLot(work.em, line.lotId)).cost = value;
   const put = { ...itemOf(line), quantity, value, purchaseOrderId, reason };
   line.movementId = (await receiveStock(work, put)).id;

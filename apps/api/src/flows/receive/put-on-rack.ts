@@ -5,6 +5,7 @@ import { findLot } from '../../modules/lots/find-lot.ts';
 import { drawTag, requireFreeTag } from '../../modules/lots/lot-tags.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
 import type { PurchaseLine } from '../../modules/purchase-orders/purchase-line.entity.ts';
+import { sayDay } from '../../modules/quotes/say-day.ts';
 import { receiveStock } from '../../modules/stock/stock-ledger.ts';
 import type { Work } from '../../work.ts';
 import type { LandedLine } from './price-delivery.ts';
@@ -30,7 +31,7 @@ export async function putOnRack(work: Work, line: LandedLine, rack: Rack): Promi
     quantity: line.quantity,
     value: costOf(line),
     purchaseOrderId: rack.purchaseOrderId,
-    reason: line.of === 'lot' && line.service ? backFrom(line.service) : batchWords(line.batch),
+    reason: line.of === 'lot' && line.service ? backFrom(line.service) : cameWith(rack, line.batch),
   });
   await log(work, line, lot);
   return { lotId: lot?.id ?? null, hardwareId: hardware?.id ?? null, movementId: movement.id };
@@ -39,8 +40,16 @@ export async function putOnRack(work: Work, line: LandedLine, rack: Rack): Promi
 /** With freight and duty, and with what it had cost before where it was out for a service. */
 const costOf = ({ goods, carriage, material }: LandedLine) => goods.plus(carriage).plus(material);
 
-/** How a batch stands in the ledger, where a failure is traced. */
-export const batchWords = (batch: string) => (batch === '' ? '' : `batch ${batch}`);
+/**
+ * What the ledger says beside goods that came: their batch, by which a failure is traced, and where no order stands
+ * there as their paper, the day of the delivery.
+ */
+export function cameWith({ receivedOn, purchaseOrderId }: Rack, batch: string): string {
+  return [
+    ...(purchaseOrderId === null ? [`delivery of ${sayDay(receivedOn)}`] : []),
+    ...(batch === '' ? [] : [`batch ${batch}`]),
+  ].join(', ');
+}
 
 const backFrom = ({ service }: PurchaseLine) => `back from ${service ?? ''}`;
 

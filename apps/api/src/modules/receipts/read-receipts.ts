@@ -10,6 +10,7 @@ interface Asked {
   id?: number | undefined;
   below?: number | undefined;
   purchaseOrderId?: number | undefined;
+  withoutOrder?: 'yes' | undefined;
   limit?: number;
 }
 
@@ -51,6 +52,7 @@ export async function readReceiptList(em: EntityManager, asked: Asked): Promise<
     ...when(asked.id, 'r.id = ?'),
     ...when(asked.below, 'r.id < ?'),
     ...when(asked.purchaseOrderId, 'r.purchase_order_id = ?'),
+    ...when(asked.withoutOrder, 'r.purchase_order_id IS NULL', () => []),
   ]);
   const rows = await em.execute<Row[]>(
     `SELECT r.*, p.number AS purchase_order_number

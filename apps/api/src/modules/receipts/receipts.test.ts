@@ -334,6 +334,41 @@ describe('part deliveries', () => {
   });
 });
 
+describe('a delivery without an order', () => {
+  const alone = (body: object) => shop.as('owner').post('/api/receipts').send(body).expect(201);
+
+  it('stands in the ledger with its day, for leather and for hardware', async () => {
+    const { body } = await alone({
+      receivedOn: '2026-11-30',
+      lots: [{ leatherId: things.leatherId, form: 'side', measuredAreaMm2: ft2(20) }],
+      hardware: [{ hardwareId: things.hardwareId, quantity: 50, batch: 'K7-204' }],
+    });
+    const [lot, hardware] = body.receipt.lines;
+    const reasonsOf = async (query: string) =>
+      (await ledger(query)).map((row: { reason: string }) => row.reason);
+    expect(await reasonsOf(`lotId=${lot.lotId}`)).toEqual(['delivery of Mon 30 Nov 2026']);
+    await correct(body.receipt.id, body.receipt.version, { freight: '6.00' }).expect(200);
+    expect(await reasonsOf(`hardwareId=${hardware.hardwareId}`)).toEqual([
+      'delivery of Mon 30 Nov 2026, batch K7-204, cost put right',
+      'to be written again at another cost',
+      'delivery of Mon 30 Nov 2026, batch K7-204',
+    ]);
+  });
+
+  it('is listed apart from those of orders', async () => {
+    const { body } = await alone({
+      hardware: [{ hardwareId: things.hardwareId, quantity: 50 }],
+    });
+    await receive({ hardware: [rivets(10)] }).expect(201);
+    const listed = await shop.as('owner').get('/api/receipts?withoutOrder=yes').expect(200);
+    expect(listed.body.items[0]).toMatchObject({ id: body.receipt.id, purchaseOrderId: null });
+    const papers = listed.body.items.map(
+      (each: { purchaseOrderId: number | null }) => each.purchaseOrderId,
+    );
+    expect(new Set(papers)).toEqual(new Set([null]));
+  });
+});
+
 it('keeps every rule of the books', async () => {
   const results = await verifyFolder(shop.context.config.dataDir);
   expect(results.flatMap(({ faults }) => faults)).toEqual([]);

@@ -55,6 +55,11 @@ export const stockroomRoutes: RouteObject[] = [
         lazy: () => import('./stockroom/receive.tsx'),
       },
       {
+        path: 'deliveries',
+        handle: { crumb: 'Deliveries without an order' },
+        lazy: () => import('./stockroom/deliveries.tsx'),
+      },
+      {
         path: 'leather',
         handle: { crumb: 'Leather' },
         children: [

@@ -66,6 +66,20 @@ export function receiptsQuery(purchaseOrderId: number) {
   });
 }
 
+/** Deliveries that came without an order, newest first, page by page. */
+export function receiptsWithoutOrderQuery() {
+  return infiniteQueryOptions({
+    queryKey: ['purchase-orders', 'without order'],
+    queryFn: ({ signal, pageParam }) =>
+      call(listReceipts, {
+        query: { withoutOrder: 'yes', limit: 20, ...(pageParam && { cursor: pageParam }) },
+        signal,
+      }),
+    initialPageParam: '',
+    getNextPageParam: (last) => last.next,
+  });
+}
+
 /** What of an order went back to its supplier. */
 export function supplierReturnsQuery(id: number) {
   return queryOptions({

@@ -64,9 +64,8 @@ export function Component() {
       {receipts.items.map((receipt, at) => (
         <ReceiptCard
           key={receipt.id}
-          order={order}
           receipt={receipt}
-          count={receipts.items.length - at}
+          of={{ order, count: receipts.items.length - at }}
           isOwner={isOwner}
         />
       ))}

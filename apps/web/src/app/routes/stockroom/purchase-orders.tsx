@@ -8,6 +8,7 @@ import { PageLoading } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { StateFilter } from '../../../components/state-filter.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { PurchaseOrdersTable } from '../../../features/purchase-orders/components/purchase-orders-table.tsx';
 import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
@@ -63,6 +64,9 @@ export function Component() {
           )
         }
       />
+      <p className="mt-5">
+        <TextLink to="/stockroom/deliveries">Deliveries without an order</TextLink>
+      </p>
     </>
   );
 }

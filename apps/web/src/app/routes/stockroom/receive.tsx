@@ -159,8 +159,8 @@ function Received({ received, onMore }: ReceivedProps) {
               To {order.number}
             </LinkButton>
           ) : (
-            <LinkButton tone="primary" to="/stockroom/lots">
-              To the lots
+            <LinkButton tone="primary" to="/stockroom/deliveries">
+              To the delivery
             </LinkButton>
           )}
           {open && <Button onClick={onMore}>Receive more</Button>}

@@ -12,23 +12,24 @@ import { ReceiptLinesTable } from './receipt-lines-table.tsx';
 const sharedWords = { value: 'by value', area: 'by area', count: 'by count' };
 
 interface ReceiptCardProps {
-  order: PurchaseOrder;
   receipt: Receipt;
-  /** Which delivery of the order it is, from 1. */
-  count: number;
+  /** The order that it was for, and which delivery of it this is, from 1; none where nobody can be claimed from. */
+  of?: { order: PurchaseOrder; count: number } | undefined;
   isOwner: boolean;
 }
 
-/** One delivery of an order: what came, what it cost to bring, and what is short of its mark. */
-export function ReceiptCard({ order, receipt, count, isOwner }: ReceiptCardProps) {
+/** One delivery: what came, what it cost to bring, and what is short of its mark. */
+export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
   const { today } = useWorkshop();
   const [asking, setAsking] = useState<'costs' | 'claim'>();
   const close = () => setAsking(undefined);
   const short = receipt.lines.filter((line) => line.marked?.short && line.claimId === null);
   const { freight, duty } = receipt;
+  const day = dayText(receipt.receivedOn, today);
+  const title = of ? `Delivery ${of.count}, ${day}` : `Delivery of ${day}`;
   return (
     <Card
-      title={`Delivery ${count}, ${dayText(receipt.receivedOn, today)}`}
+      title={title}
       subtitle={`received by ${receipt.byName}`}
       aside={
         isOwner &&
@@ -47,7 +48,8 @@ export function ReceiptCard({ order, receipt, count, isOwner }: ReceiptCardProps
               : `${short.length} lots are short of their mark.`
           }
           actions={
-            isOwner && (
+            isOwner &&
+            of && (
               <Button tone="primary" onClick={() => setAsking('claim')}>
                 Claim it
               </Button>
@@ -58,12 +60,14 @@ export function ReceiptCard({ order, receipt, count, isOwner }: ReceiptCardProps
           {percentText(receipt.tolerancePercent)} smaller than marked.
         </Notice>
       )}
-      <ReceiptLinesTable receipt={receipt} label={`What came with delivery ${count}`} />
+      <ReceiptLinesTable receipt={receipt} label={`What came: ${title}`} />
       {freight !== undefined && duty !== undefined && (
         <Carriage freight={freight} duty={duty} sharedBy={sharedWords[receipt.sharedBy]} />
       )}
       {asking === 'costs' && <ReceiptCostsDialog receipt={receipt} onClose={close} />}
-      {asking === 'claim' && <ClaimDialog order={order} receipt={receipt} onClose={close} />}
+      {asking === 'claim' && of && (
+        <ClaimDialog order={of.order} receipt={receipt} onClose={close} />
+      )}
     </Card>
   );
 }

@@ -4,6 +4,7 @@ import { Link, useNavigate } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { ScanField } from '../../../components/scan-field.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { call } from '../../../lib/api.ts';
 import { dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -41,9 +42,12 @@ export function AwaitedOrders({ orders }: { orders: readonly PurchaseOrder[] }) 
           </ul>
         )}
       </Card>
-      <LinkButton to="/stockroom/receive?order=none" className="min-h-11">
-        It came without an order
-      </LinkButton>
+      <div className="flex flex-wrap items-center gap-x-6 gap-y-2">
+        <LinkButton to="/stockroom/receive?order=none" className="min-h-11">
+          It came without an order
+        </LinkButton>
+        <TextLink to="/stockroom/deliveries">Came so before</TextLink>
+      </div>
     </div>
   );
 }

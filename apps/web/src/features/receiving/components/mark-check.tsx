@@ -8,8 +8,15 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 const isArea = (value: unknown): value is string =>
   typeof value === 'string' && isFigure(value) && Number(value) > 0;
 
+interface MarkCheckProps {
+  lot: string;
+  tolerancePercent: string;
+  /** Whether it came for an order, so that there is a supplier to claim it from. */
+  hasOrder: boolean;
+}
+
 /** How the measured area of a lot stands to the one marked on it, while both are typed. */
-export function MarkCheck({ lot, tolerancePercent }: { lot: string; tolerancePercent: string }) {
+export function MarkCheck({ lot, tolerancePercent, hasOrder }: MarkCheckProps) {
   const workshop = useWorkshop();
   const names = [`${lot}.markedAreaMm2`, `${lot}.measuredAreaMm2`];
   const [marked, measured] = useWatch({ name: names }) as unknown[];
@@ -20,7 +27,8 @@ export function MarkCheck({ lot, tolerancePercent }: { lot: string; tolerancePer
   if (short) {
     return (
       <Notice tone="attention" live className="sm:col-span-2" title="Short of its mark.">
-        {`It misses ${by}, and the shop lets ${percentText(tolerancePercent)} pass. The owner can claim what is missing.`}
+        {`It misses ${by}, and the shop lets ${percentText(tolerancePercent)} pass.`}
+        {hasOrder && ' The owner can claim what is missing.'}
       </Notice>
     );
   }

@@ -69,7 +69,7 @@ export function ReceivedLot(props: ReceivedLotProps) {
             help="As it went out: measure it anew."
           />
         ) : (
-          <Areas lot={lot} tolerancePercent={tolerancePercent} />
+          <Areas lot={lot} tolerancePercent={tolerancePercent} hasOrder={ordered !== undefined} />
         )}
         <SelectField name={`${lot}.form`} label="Form" choices={forms} />
         {cutToSize.includes(form) && (
@@ -94,8 +94,14 @@ export function ReceivedLot(props: ReceivedLotProps) {
   );
 }
 
+interface AreasProps {
+  lot: string;
+  tolerancePercent: string;
+  hasOrder: boolean;
+}
+
 /** As it is stamped on, and as it is measured here. */
-function Areas({ lot, tolerancePercent }: { lot: string; tolerancePercent: string }) {
+function Areas({ lot, tolerancePercent, hasOrder }: AreasProps) {
   return (
     <>
       <div className="grid grid-cols-2 gap-x-4 sm:col-span-2">
@@ -108,7 +114,7 @@ function Areas({ lot, tolerancePercent }: { lot: string; tolerancePercent: strin
         />
         <AreaField name={`${lot}.measuredAreaMm2`} label="Measured area" help="As measured here." />
       </div>
-      <MarkCheck lot={lot} tolerancePercent={tolerancePercent} />
+      <MarkCheck lot={lot} tolerancePercent={tolerancePercent} hasOrder={hasOrder} />
     </>
   );
 }
