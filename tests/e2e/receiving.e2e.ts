@@ -197,6 +197,9 @@ walk('what came without an order is listed, and what it cost is put right', asyn
   await shortfall.waitFor();
   expect(await shortfall.textContent()).not.toContain('claim');
   await lot.getByLabel(/^Tag/).fill('MKT-1');
+  await lot.getByRole('button', { name: /^Weight, grade/ }).click();
+  await lot.getByLabel(/^Weight/).fill('2.4 mm');
+  await expectAccessible(page);
   await page.getByRole('button', { name: 'Put it on the rack' }).click();
   await page.getByRole('link', { name: 'To the delivery' }).click();
   await page.waitForURL('**/stockroom/deliveries');
@@ -211,5 +214,11 @@ walk('what came without an order is listed, and what it cost is put right', asyn
   await expectAccessible(page);
   await page.setViewportSize(phone);
   await settled(page);
+  await expectNoOverflow(page);
+  await card.getByRole('link', { name: 'MKT-1' }).click();
+  await page.getByText('6.047 oz (2.4 mm)').waitFor();
+  await page.getByLabel(/^Weight/).fill('5½');
+  await page.getByRole('button', { name: 'Save', exact: true }).click();
+  await page.getByText('5.5 oz (2.2 mm)').waitFor();
   await expectNoOverflow(page);
 });

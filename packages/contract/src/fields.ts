@@ -74,6 +74,11 @@ export const seconds = decimalText(
   'Enter seconds, not negative, with at most two decimals.',
 );
 export const ounces = decimalText(2, 3, '5.5', 'Enter a weight in ounces, such as 5 or 5.5.');
+/** The weight of leather that was laid under a gauge. */
+export const weighed = ounces.refine(
+  (text) => Number(text) > 0,
+  'Enter a weight above 0 oz, or leave it empty.',
+);
 /** An exact decimal that the program worked out. */
 export const workedOut = z.string().meta({ example: '93.20' });
 

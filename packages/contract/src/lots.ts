@@ -14,6 +14,7 @@ import {
   paperNumber,
   percent,
   version,
+  weighed,
 } from './fields.ts';
 import { lie } from './layouts.ts';
 import { photoPlace } from './lot-photos.ts';
@@ -59,6 +60,8 @@ export const lot = z
     pieces: z.int(),
     widthMm: z.string().nullable(),
     heightMm: z.string().nullable(),
+    /** As this leather measured, which its kind gives only from and to. */
+    weightOz: z.string().nullable(),
     cost: confidential(z.string()),
     grade: z.string(),
     shade: z.string(),
@@ -114,6 +117,7 @@ export const changeLot = endpoint({
   body: z
     .strictObject({
       tag,
+      weightOz: weighed.nullable(),
       grade: optionalLine(30),
       shade: optionalLine(30),
       place: optionalLine(60),

@@ -16,6 +16,7 @@ import {
   pageQuery,
   positiveCount,
   version,
+  weighed,
 } from './fields.ts';
 import { hardware } from './hardware.ts';
 import { lot, lotForms } from './lots.ts';
@@ -119,6 +120,7 @@ const receivedLot = z.strictObject({
   pieces: positiveCount.max(10_000, 'A bundle holds at most 10,000 pieces.').default(1),
   widthMm: side.nullable().default(null),
   heightMm: side.nullable().default(null),
+  weightOz: weighed.nullable().default(null),
   /** What the goods cost, if the owner types it; otherwise the order's or the leather's price per ft² says it. */
   cost: money.nullable().default(null),
   grade: optionalLine(30).default(''),

@@ -40,20 +40,20 @@ export async function putOffcutBack(work: Work, jobId: number, asked: Asked): Pr
   return offcut;
 }
 
-/** The offcut with its tag: it is of the same leather, shade and supplier's lot, and came on the same day. */
+/** The offcut with its tag: it is of the same leather, weight, shade and supplier's lot, and came on the same day. */
 async function hang(
   work: Work,
   from: Lot,
   { widthMm, heightMm, place }: Asked,
   { areaMm2, cost }: { areaMm2: Decimal; cost: Decimal },
 ): Promise<Lot> {
-  const { leatherId, grade, shade, supplierLot, receivedOn, usablePercent } = from;
+  const { leatherId, weightOz, grade, shade, supplierLot, receivedOn, usablePercent } = from;
   const offcut = work.em.create(Lot, {
     tag: await drawTag(work.em),
     form: 'offcut',
     measuredAreaMm2: areaMm2,
     parentId: from.id,
-    ...{ leatherId, grade, shade, supplierLot, receivedOn, usablePercent, place, cost },
+    ...{ leatherId, weightOz, grade, shade, supplierLot, receivedOn, usablePercent, place, cost },
   });
   if (widthMm !== null) offcut.widthMm = new Decimal(widthMm);
   if (heightMm !== null) offcut.heightMm = new Decimal(heightMm);

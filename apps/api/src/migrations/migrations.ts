@@ -13,6 +13,7 @@ import { TheFamily } from './migration-20261204-the-family.ts';
 import { TheOrdersDue } from './migration-20261204-the-orders-due.ts';
 import { TheShelf } from './migration-20261204-the-shelf.ts';
 import { TheServices } from './migration-20261205-the-services.ts';
+import { TheWeights } from './migration-20261206-the-weights.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -31,4 +32,5 @@ export const migrations = [
   { name: 'migration-20261204-the-orders-due', class: TheOrdersDue },
   { name: 'migration-20261204-the-shelf', class: TheShelf },
   { name: 'migration-20261205-the-services', class: TheServices },
+  { name: 'migration-20261206-the-weights', class: TheWeights },
 ];

@@ -27,7 +27,12 @@ it('a data folder from before photos opens, its drawings as they were', async ()
 
   const context = await createContext(config);
   const lot = await context.orm.em.fork().findOneOrFail(Lot, 7);
-  expect(lot).toMatchObject({ tag: 'T-0007', photoHash: null, photoPlace: null });
+  expect(lot).toMatchObject({
+    tag: 'T-0007',
+    photoHash: null,
+    photoPlace: null,
+    weightOz: null,
+  });
   expect(lot.outline).toHaveLength(3);
   await closeContext(context);
   await rm(dataDir, { recursive: true, force: true });

@@ -1,5 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { areaFigure, lengthFigure, readArea, readLength, readMixedNumber } from './units.ts';
+import {
+  areaFigure,
+  lengthFigure,
+  readArea,
+  readLength,
+  readMixedNumber,
+  readWeight,
+} from './units.ts';
 
 describe('what a person types for a measure', () => {
   it.each([
@@ -51,5 +58,20 @@ describe('what a person types for a measure', () => {
       const typed = String(tenths / 10);
       expect(areaFigure(readArea(typed, 'ft2') ?? '', 'ft2', 4)).toBe(typed);
     }
+  });
+});
+
+describe('a weight of leather', () => {
+  it.each([
+    ['5.5', '5.5'],
+    ['5½ oz', '5.5'],
+    ['2.4 mm', '6.047'],
+    ['2.4mm', '6.047'],
+    ['0', '0'],
+    ['thick', undefined],
+    ['-2', undefined],
+    ['mm', undefined],
+  ])('reads %s as %s oz', (text, oz) => {
+    expect(readWeight(text)).toBe(oz);
   });
 });

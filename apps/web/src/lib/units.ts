@@ -1,3 +1,4 @@
+import { convert } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { Workshop } from './workshop.tsx';
 
@@ -54,6 +55,18 @@ export function readLength(text: string, unit: LengthUnit): string | undefined {
   const [, figure = text, written] = /^(.*?)\s*(mm|in|")$/.exec(text.trim()) ?? [];
   const used = written === undefined ? unit : written === 'mm' ? 'mm' : 'in';
   return readMixedNumber(figure)?.times(lengthUnits[used].mm).toDecimalPlaces(6).toFixed();
+}
+
+/**
+ * A weight of leather in ounces to a thousandth, as it was typed or from the thickness that was measured (2.4 mm);
+ * undefined if it is no weight.
+ */
+export function readWeight(text: string): string | undefined {
+  const [, figure = text, written] = /^(.*?)\s*(oz|mm)$/.exec(text.trim()) ?? [];
+  const typed = readMixedNumber(figure);
+  return (written === 'mm' ? typed && convert(typed, 'mm', 'oz') : typed)
+    ?.toDecimalPlaces(3)
+    .toFixed();
 }
 
 /** An area in the shop's unit, without its sign. */

@@ -61,7 +61,7 @@ async function hang(
 ): Promise<Lot> {
   const { typed, field, leather, purchaseLineId } = line;
   if (typed.tag !== '') await requireFreeTag(work.em, typed.tag, `${field}.tag`);
-  const { form, pieces, grade, shade, place, supplierLot, widthMm, heightMm } = typed;
+  const { form, pieces, grade, shade, place, supplierLot, widthMm, heightMm, weightOz } = typed;
   const lot = work.em.create(Lot, {
     tag: typed.tag === '' ? await drawTag(work.em) : typed.tag,
     leatherId: leather.id,
@@ -78,6 +78,7 @@ async function hang(
     lot.supplierLot = (await findLot(work.em, lot.parentId)).supplierLot;
   if (widthMm !== null) lot.widthMm = new Decimal(widthMm);
   if (heightMm !== null) lot.heightMm = new Decimal(heightMm);
+  if (weightOz !== null) lot.weightOz = new Decimal(weightOz);
   await work.em.flush();
   return lot;
 }

@@ -1,6 +1,12 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 import { Decimal } from 'decimal.js';
-import { AreaType, LengthType, MoneyType, PercentType } from '../../db/columns/columns.ts';
+import {
+  AreaType,
+  LengthType,
+  MoneyType,
+  OunceType,
+  PercentType,
+} from '../../db/columns/columns.ts';
 import { JsonText } from '../../db/columns/json-text.ts';
 
 /** One side, hide or bundle of panels on the rack. */
@@ -44,6 +50,10 @@ export class Lot {
 
   @Property({ type: LengthType, nullable: true })
   heightMm: Decimal | null = null;
+
+  /** As measured on it; null where nobody did. */
+  @Property({ type: OunceType, nullable: true })
+  weightOz: Decimal | null = null;
 
   @Property({ type: MoneyType })
   cost!: Decimal;

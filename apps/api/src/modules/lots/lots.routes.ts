@@ -39,7 +39,9 @@ export function lotRoutes(context: Context): Router {
     const lot = await findLot(work.em, params.id);
     await requireVersion(work.em, { kind: 'lot', id: lot.id, version: lot.version }, ifMatch);
     if (body.tag !== undefined) await requireFreeTag(work.em, body.tag, 'tag', lot.id);
-    assignDefined(lot, body);
+    const { weightOz, ...others } = body;
+    assignDefined(lot, others);
+    if (weightOz !== undefined) lot.weightOz = weightOz === null ? null : new Decimal(weightOz);
     await work.em.flush();
     await logDeed(work, {
       action: `changed lot ${lot.tag}`,

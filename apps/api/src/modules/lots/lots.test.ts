@@ -48,6 +48,31 @@ describe('lots', () => {
     });
   });
 
+  it('have a weight of their own, above 0, which can be put right and taken off again', async () => {
+    const lot = await hang({ weightOz: '6.047' });
+    const change = (version: number, weightOz: string | null) =>
+      shop
+        .as('maker')
+        .patch(`/api/lots/${lot.id}`)
+        .set('If-Match', `"${version}"`)
+        .send({ weightOz });
+    const { body } = await shop.as('maker').get(`/api/lots/${lot.id}`).expect(200);
+    expect(body).toMatchObject({ weightOz: '6.047' });
+    const moved = await change(lot.version, '5.5').expect(200);
+    expect(moved.body).toMatchObject({ weightOz: '5.5' });
+    const refused = await change(moved.body.version, '0').expect(422);
+    expect(refused.body.errors).toMatchObject([{ field: 'weightOz' }]);
+    const placed = await shop
+      .as('maker')
+      .patch(`/api/lots/${lot.id}`)
+      .set('If-Match', `"${moved.body.version}"`)
+      .send({ place: 'Loft' })
+      .expect(200);
+    expect(placed.body).toMatchObject({ weightOz: '5.5' });
+    const off = await change(placed.body.version, null).expect(200);
+    expect(off.body).toMatchObject({ weightOz: null });
+  });
+
   it('are moved to another place by the maker, in the version that was read', async () => {
     const lot = await hang();
     const change = () =>

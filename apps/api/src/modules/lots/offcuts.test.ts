@@ -33,7 +33,9 @@ const read = async () => {
 let sideId: number;
 beforeEach(async () => {
   const side = { leatherId: ready.leatherId, form: 'side', measuredAreaMm2: '1114836.48' };
-  const lots = [{ ...side, cost: '100.00', shade: 'mid tan', supplierLot: 'B 77' }];
+  const lots = [
+    { ...side, cost: '100.00', weightOz: '5.5', shade: 'mid tan', supplierLot: 'B 77' },
+  ];
   const hardware = [{ hardwareId: ready.hardwareId, quantity: 300, cost: '51.00' }];
   sideId = ((await make('receipts', { lots, hardware })).lots as Lot[])[0]?.id ?? 0;
   ticket = await ticketOf(ready, await takenOn(ready));
@@ -52,6 +54,7 @@ describe('an offcut that goes back on the rack', () => {
     const offcut = await lotNow((reply.body as Lot).id);
     expect(offcut).toMatchObject({
       form: 'offcut',
+      weightOz: '5.5',
       measuredAreaMm2: square300,
       freeAreaMm2: square300,
       widthMm: '300',

@@ -26,6 +26,7 @@ interface Row {
   pieces: number;
   width_mm: number | null;
   height_mm: number | null;
+  weight_oz: number | null;
   cost: number;
   grade: string;
   shade: string;
@@ -95,6 +96,7 @@ function toReply(row: Row, outFor: LotReply['outFor']): LotReply {
     pieces: row.pieces,
     widthMm: lengthText(row.width_mm),
     heightMm: lengthText(row.height_mm),
+    weightOz: row.weight_oz === null ? null : unscaled(row.weight_oz, 3).toFixed(),
     cost: moneyText(unscaled(row.cost, 2)),
     grade: row.grade,
     shade: row.shade,

@@ -159,6 +159,7 @@ export const blankLot = {
   grade: 'A',
   place: 'rack 1',
   supplierLot: '',
+  weightOz: null,
 };
 
 const areaOf = (ft2: string) => convert(ft2, 'ft2', 'mm2').toString();

@@ -1,27 +1,5 @@
 import type { Leather } from '@hidewright/contract';
-import { convert } from '@hidewright/domain';
-import { numberText } from '../../lib/formatting.ts';
-import { isFigure } from '../../lib/units.ts';
-
-type Weight = Pick<Leather, 'weightLowOz' | 'weightHighOz'>;
-
-/** 5–6 oz (2.0–2.4 mm); empty where no weight was given. */
-export function weightText({ weightLowOz, weightHighOz }: Weight): string {
-  if (weightLowOz === null) return '';
-  const high = weightHighOz ?? weightLowOz;
-  const oz = rangeText(numberText(weightLowOz, 3), numberText(high, 3));
-  return `${oz} oz (${thicknessText({ weightLowOz, weightHighOz })})`;
-}
-
-/** The same as a thickness: an ounce is 1/64 in. Empty while it is no weight yet. */
-export function thicknessText({ weightLowOz, weightHighOz }: Weight): string {
-  if (weightLowOz === null || !isFigure(weightLowOz)) return '';
-  const high = weightHighOz !== null && isFigure(weightHighOz) ? weightHighOz : weightLowOz;
-  const mm = (oz: string) => convert(oz, 'oz', 'mm').toFixed(1);
-  return `${rangeText(mm(weightLowOz), mm(high))} mm`;
-}
-
-const rangeText = (low: string, high: string) => (low === high ? low : `${low}–${high}`);
+import { weightText } from '../../lib/weight-words.ts';
 
 /** Tannage, colour, finish and weight, as far as they are known. */
 export function leatherDetail(leather: Leather): string {

@@ -23,6 +23,7 @@ export function blankLot(leatherId: number | undefined, purchaseLineId: number |
     pieces: 1,
     widthMm: null,
     heightMm: null,
+    weightOz: null,
     cost: null,
     grade: '',
     shade: '',

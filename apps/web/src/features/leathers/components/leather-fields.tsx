@@ -1,10 +1,10 @@
-import { DecimalField } from '../../../components/decimal-field.tsx';
 import { useWatch } from 'react-hook-form';
 import { AreaField } from '../../../components/area-field.tsx';
 import { AreaPriceField } from '../../../components/area-price-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
-import { thicknessText } from '../leather-words.ts';
+import { WeightField } from '../../../components/weight-field.tsx';
+import { thicknessText } from '../../../lib/weight-words.ts';
 import { WholeFields } from './whole-fields.tsx';
 
 /** What the supplier sells, as its list reads. */
@@ -16,14 +16,8 @@ export function LeatherFields({ suppliers }: { suppliers: readonly Choice[] }) {
       <fieldset>
         <legend className="sr-only">Weight</legend>
         <div className="flex flex-wrap items-start gap-x-4 gap-y-3">
-          <DecimalField
-            name="weightLowOz"
-            label="Weight from"
-            unit="oz"
-            whenEmpty="null"
-            optional
-          />
-          <DecimalField name="weightHighOz" label="to" unit="oz" whenEmpty="null" optional />
+          <WeightField name="weightLowOz" label="Weight from" help="or as thick as it is: 2.4 mm" />
+          <WeightField name="weightHighOz" label="to" />
         </div>
         <Thickness />
       </fieldset>

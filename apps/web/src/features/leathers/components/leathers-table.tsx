@@ -6,7 +6,7 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { weightText } from '../leather-words.ts';
+import { weightText } from '../../../lib/weight-words.ts';
 
 function columnsFor(workshop: Workshop, withPrices: boolean): Column<Leather>[] {
   const { areaUnit, currency } = workshop;

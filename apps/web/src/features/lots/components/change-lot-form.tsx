@@ -2,6 +2,7 @@ import { changeLot, readLot, type Lot } from '@hidewright/contract';
 import { useQueryClient } from '@tanstack/react-query';
 import { Form } from '../../../components/form.tsx';
 import { TextField } from '../../../components/text-field.tsx';
+import { WeightField } from '../../../components/weight-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { call } from '../../../lib/api.ts';
 import { useChangeLot } from '../lots.mutations.ts';
@@ -35,6 +36,7 @@ export function ChangeLotForm({ lot }: { lot: Lot }) {
     >
       <TextField name="place" label="Place" optional />
       <TextField name="shade" label="Shade" optional />
+      <WeightField name="weightOz" label="Weight" help="or as thick as it is: 2.4 mm" />
       <TextField name="grade" label="Grade" optional />
       <TextField name="supplierLot" label="Supplier’s lot" optional />
       <TextField name="tag" label="Tag" help="As it hangs on the leather." />
@@ -42,6 +44,6 @@ export function ChangeLotForm({ lot }: { lot: Lot }) {
   );
 }
 
-function typedOf({ tag, place, shade, grade, supplierLot }: Lot) {
-  return { tag, place, shade, grade, supplierLot };
+function typedOf({ tag, weightOz, place, shade, grade, supplierLot }: Lot) {
+  return { tag, weightOz, place, shade, grade, supplierLot };
 }

@@ -3,6 +3,7 @@ import { KeyFigures } from '../../../components/key-figures.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { rackAreaText, dayText, moneyText } from '../../../lib/formatting.ts';
+import { weightText } from '../../../lib/weight-words.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 const given = (text: string) => (text === '' ? '–' : text);
@@ -42,6 +43,10 @@ export function LotFacts({ lot }: { lot: Lot }) {
             figure: (
               <TextLink to={`/stockroom/leather/${lot.leatherId}`}>{lot.leatherName}</TextLink>
             ),
+          },
+          {
+            word: 'Weight',
+            figure: given(weightText({ weightLowOz: lot.weightOz, weightHighOz: null })),
           },
           { word: 'Place', figure: given(lot.place) },
           { word: 'Shade', figure: given(lot.shade) },

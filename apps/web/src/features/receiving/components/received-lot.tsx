@@ -8,6 +8,7 @@ import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
+import { WeightField } from '../../../components/weight-field.tsx';
 import { MarkCheck } from './mark-check.tsx';
 import { TagField } from './tag-field.tsx';
 
@@ -119,7 +120,7 @@ function Areas({ lot, tolerancePercent, hasOrder }: AreasProps) {
   );
 }
 
-const furtherFields = ['grade', 'supplierLot', 'cost'];
+const furtherFields = ['weightOz', 'grade', 'supplierLot', 'cost'];
 
 interface MoreOfLotProps {
   lot: string;
@@ -141,10 +142,19 @@ function MoreOfLot({ lot, mayPrice, isWork }: MoreOfLotProps) {
         aria-expanded={open}
         onClick={() => setAsked(!open)}
       >
-        {open ? 'Less' : mayPrice ? 'Grade, supplier’s lot, cost' : 'Grade, supplier’s lot'}
+        {open
+          ? 'Less'
+          : mayPrice
+            ? 'Weight, grade, supplier’s lot, cost'
+            : 'Weight, grade, supplier’s lot'}
       </Button>
       {open && (
         <div className="mt-2 grid items-start gap-x-4 gap-y-3 sm:grid-cols-2">
+          <WeightField
+            name={`${lot}.weightOz`}
+            label="Weight"
+            help="or as thick as it is: 2.4 mm"
+          />
           <TextField name={`${lot}.grade`} label="Grade" optional />
           <TextField
             name={`${lot}.supplierLot`}

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { weightText } from './leather-words.ts';
+import { weightText } from './weight-words.ts';
 
 describe('the weight of a leather', () => {
   it.each([
