@@ -8,9 +8,9 @@ import { readSheetLines, type SheetLine } from '../modules/counts/count-sheet-li
 import { findCount } from '../modules/counts/find-count.ts';
 import { readCountCards } from '../modules/counts/read-counts.ts';
 import type { StockCount } from '../modules/counts/stock-count.entity.ts';
-import { readReservations } from '../modules/stock/read-ledger.ts';
+import { readReservationsOf } from '../modules/stock/read-ledger.ts';
 import { itemOf } from '../modules/stock/stock-item.ts';
-import { costOfChange } from '../modules/stock/stock-ledger.ts';
+import { costsOfChanges } from '../modules/stock/stock-value.ts';
 import type { Work } from '../work.ts';
 
 /** A sheet as it stands. While it is counted, nobody is told what the books say. */
@@ -19,8 +19,7 @@ export async function describeCount(work: Work, id: number): Promise<CountReply>
   const [card] = await readCountCards(work.em, { id, limit: 1 });
   if (card === undefined) throw notFound('count sheet');
   const rows = await readSheetLines(work.em, id);
-  const lines: CountLine[] = [];
-  for (const row of rows) lines.push(await toReply(work, sheet, row));
+  const lines = await toReplies(work, sheet, rows);
   return {
     ...card,
     place: sheet.place,
@@ -39,7 +38,9 @@ export async function describeCountLine(
   const sheet = await findCount(work.em, countId);
   const row = (await readSheetLines(work.em, countId)).find(({ id }) => id === lineId);
   if (row === undefined) throw notFound('line on this sheet');
-  return toReply(work, sheet, row);
+  const [line] = await toReplies(work, sheet, [row]);
+  if (line === undefined) throw notFound('line on this sheet');
+  return line;
 }
 
 const sumOf = (lines: readonly CountLine[]): string =>
@@ -51,13 +52,30 @@ const areaOf = (row: SheetLine, quantity: number | null): string | null =>
 const countOf = (row: SheetLine, quantity: number | null): number | null =>
   row.lotId === null ? quantity : null;
 
-async function toReply(work: Work, sheet: StockCount, row: SheetLine): Promise<CountLine> {
-  const { counted, book, onHand, reserved, posted: _, ...said } = row;
-  const shown = sheet.state === 'open' ? null : book;
-  const difference =
-    counted === null || shown === null
-      ? null
-      : countOutcome({ counted, bookThen: shown, onHandNow: onHand, reserved }).difference;
+const shownOf = (sheet: StockCount, { book }: SheetLine): number | null =>
+  sheet.state === 'open' ? null : book;
+
+function differenceOf(sheet: StockCount, row: SheetLine): number | null {
+  const { counted, onHand, reserved } = row;
+  const bookThen = shownOf(sheet, row);
+  return counted === null || bookThen === null
+    ? null
+    : countOutcome({ counted, bookThen, onHandNow: onHand, reserved }).difference;
+}
+
+async function toReplies(
+  work: Work,
+  sheet: StockCount,
+  rows: readonly SheetLine[],
+): Promise<CountLine[]> {
+  const valueOf = await valuesOf(work, sheet, rows);
+  return rows.map((row) => toReply(sheet, row, valueOf(row)));
+}
+
+function toReply(sheet: StockCount, row: SheetLine, value: string | null): CountLine {
+  const { counted, book: _, onHand, reserved: __, posted: ___, ...said } = row;
+  const shown = shownOf(sheet, row);
+  const difference = differenceOf(sheet, row);
   return {
     ...said,
     countedAreaMm2: areaOf(row, counted),
@@ -66,33 +84,39 @@ async function toReply(work: Work, sheet: StockCount, row: SheetLine): Promise<C
     bookQuantity: countOf(row, shown),
     differenceAreaMm2: areaOf(row, difference),
     differenceQuantity: countOf(row, difference),
-    differenceValue: await valueOf(work, sheet, row, difference),
+    differenceValue: value,
     movedSince: sheet.state === 'handed in' && shown !== null && shown !== onHand,
   };
 }
 
-/** At cost: as posted, or as it would be posted now. */
-async function valueOf(
+/** What the differences are worth at cost: as posted, or as they would be posted now. */
+async function valuesOf(
   work: Work,
   sheet: StockCount,
-  row: SheetLine,
-  difference: number | null,
-): Promise<string | null> {
-  if (difference === null) return null;
-  if (sheet.state === 'approved') return moneyText(unscaled(row.posted ?? 0, 2));
-  return moneyText(await costOfChange(work.em, itemOf(row), difference));
+  rows: readonly SheetLine[],
+): Promise<(row: SheetLine) => string | null> {
+  const changeOf = (row: SheetLine) =>
+    sheet.state === 'approved' ? 0 : (differenceOf(sheet, row) ?? 0);
+  const costOf = await costsOfChanges(
+    work.em,
+    rows.map((row) => ({ item: itemOf(row), change: changeOf(row) })),
+  );
+  return (row) => {
+    if (differenceOf(sheet, row) === null) return null;
+    if (sheet.state === 'approved') return moneyText(unscaled(row.posted ?? 0, 2));
+    return moneyText(costOf(itemOf(row), changeOf(row)));
+  };
 }
 
 /** What is held for jobs of things of which the sheet leaves less than is held. */
 async function wouldBreak(work: Work, rows: readonly SheetLine[]): Promise<CountReply['broken']> {
-  const broken: NonNullable<CountReply['broken']> = [];
-  for (const row of rows) {
-    const { counted, book, onHand, reserved, lotId, hardwareId } = row;
-    if (counted === null || book === null) continue;
+  const short = rows.filter(({ counted, book, onHand, reserved }) => {
+    if (counted === null || book === null) return false;
     const outcome = countOutcome({ counted, bookThen: book, onHandNow: onHand, reserved });
-    if (outcome.missing === 0) continue;
-    const asked = { lotId: lotId ?? undefined, hardwareId: hardwareId ?? undefined, limit: 200 };
-    broken.push(...(await readReservations(work.em, asked)));
-  }
-  return broken;
+    return outcome.missing > 0;
+  });
+  return readReservationsOf(work.em, {
+    lotIds: short.flatMap(({ lotId }) => lotId ?? []),
+    hardwareIds: short.flatMap(({ hardwareId }) => hardwareId ?? []),
+  });
 }

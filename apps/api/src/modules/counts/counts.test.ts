@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { writeBareJob } from '../../testing/bare-job.ts';
 import { ft2, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
@@ -300,5 +300,30 @@ describe('a count', () => {
     expect(order).not.toContain(dye);
     const stray = await open({ of: 'place', place: 'Zinc drawer' });
     expect(stray.lines).toMatchObject([{ hardwareId: far }]);
+  });
+
+  it('asks the ledger no more often for many lines than for few, and not for what agrees', async () => {
+    const executed = vi.spyOn(shop.context.orm.em.getConnection(), 'execute');
+    const asked = async (feet: number[], more: number) => {
+      const { id, lines } = await sheetOf(...feet);
+      for (const [at, line] of lines.entries())
+        await enter(id, line, { areaMm2: ft2((feet[at] ?? 0) + more) }).expect(200);
+      await handIn(id).expect(201);
+      executed.mockClear();
+      const sheet = await read(id);
+      return { queries: executed.mock.calls.length, value: sheet.differenceValue as string };
+    };
+    try {
+      const few = await asked([20, 22], -1);
+      const many = await asked([20, 21, 22, 23, 24, 25], -1);
+      expect([few.value, many.value]).toEqual(['-18.00', '-54.00']);
+      expect(few.queries).toBeGreaterThan(0);
+      expect(many.queries).toBe(few.queries);
+      const same = await asked([20, 21, 22], 0);
+      expect(same.value).toBe('0.00');
+      expect(same.queries).toBeLessThan(few.queries);
+    } finally {
+      executed.mockRestore();
+    }
   });
 });

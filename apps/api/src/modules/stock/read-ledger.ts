@@ -108,11 +108,30 @@ export async function readReservations(
   em: EntityManager,
   asked: Asked,
 ): Promise<StockReservation[]> {
-  const { where, values } = whereAll([{ sql: 'm.open > 0', values: [] }, ...conditionsOf(asked)]);
+  return reservationsWhere(em, conditionsOf(asked), asked.limit);
+}
+
+/** What is still held for jobs of any of these things, newest first. */
+export async function readReservationsOf(
+  em: EntityManager,
+  { lotIds, hardwareIds }: { lotIds: readonly number[]; hardwareIds: readonly number[] },
+): Promise<StockReservation[]> {
+  if (lotIds.length + hardwareIds.length === 0) return [];
+  const any = `(m.lot_id IN (SELECT value FROM json_each(?)) OR m.hardware_id IN (SELECT value FROM json_each(?)))`;
+  const values = [JSON.stringify(lotIds), JSON.stringify(hardwareIds)];
+  return reservationsWhere(em, [{ sql: any, values }], -1);
+}
+
+async function reservationsWhere(
+  em: EntityManager,
+  conditions: ReturnType<typeof conditionsOf>,
+  limit: number,
+): Promise<StockReservation[]> {
+  const { where, values } = whereAll([{ sql: 'm.open > 0', values: [] }, ...conditions]);
   const rows = await em.execute<ReservationRow[]>(
     `SELECT m.*, lot.tag AS lot_tag, h.name AS hardware_name, job.number AS job_number
      ${named('reservation')} ${where} ORDER BY m.id DESC LIMIT ?`,
-    [...values, asked.limit],
+    [...values, limit],
   );
   return rows.map((row) => ({
     ...itemOf(row, row.open),

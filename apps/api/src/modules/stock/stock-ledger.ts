@@ -9,7 +9,7 @@ import { StockBalance } from './stock-balance.entity.ts';
 import { itemOf, keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
 import { notFreeToGo, requireQuantity, tooLittle } from './stock-refusals.ts';
-import { costOfComing, costOfGoing, shareOfCost } from './stock-value.ts';
+import { costOfChange, costOfGoing, shareOfCost } from './stock-value.ts';
 import { takenBy } from './taken-by-job.ts';
 
 /*
@@ -255,17 +255,6 @@ export async function postCount(
   if (onHand + difference < 0) throw new RangeError('A count never leaves less than nothing');
   const value = await costOfChange(work.em, item, difference);
   return move(work, item, { kind: 'count', quantity: difference, value, reason });
-}
-
-/** What a change of what is on hand is worth, signed like it, to the cent. */
-export async function costOfChange(
-  em: EntityManager,
-  item: StockItem,
-  change: number,
-): Promise<Decimal> {
-  return change < 0
-    ? (await costOfGoing(em, item, -change)).negated()
-    : costOfComing(em, item, change);
 }
 
 /** What the books said was on hand at an instant. */

@@ -1,10 +1,9 @@
 import { Decimal } from 'decimal.js';
-import { costOfOldest, Exact, round, stockLayers, type StockLayer } from '@hidewright/domain';
+import { costOfOldest, Exact, round } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
-import { Workshop } from '../workshop/workshop.entity.ts';
-import { describeItem } from './described-item.ts';
-import { keysOf, type StockItem } from './stock-item.ts';
+import type { StockItem } from './stock-item.ts';
+import { readValueFacts, type ValueFacts } from './value-facts.ts';
 
 /*
  * What stock is worth when it moves. A lot stands at its own cost; hardware and supplies at their moving average, or
@@ -12,22 +11,6 @@ import { keysOf, type StockItem } from './stock-item.ts';
  * always worth the sum of its movements; a choice made later holds for what moves later, and what is there at that
  * moment is then the oldest layer, at what the ledger says it is worth.
  */
-
-interface Held {
-  onHand: number;
-  value: Decimal;
-}
-
-/** What the ledger says is on hand of an item, and what it is worth. */
-async function heldOf(em: EntityManager, item: StockItem): Promise<Held> {
-  const { lotId, hardwareId } = keysOf(item);
-  const [row] = await em.execute<[{ quantity: number; value: number }]>(
-    `SELECT COALESCE(SUM(quantity), 0) AS quantity, COALESCE(SUM(value), 0) AS value
-     FROM stock_movement WHERE lot_id IS ? AND hardware_id IS ?`,
-    [lotId, hardwareId],
-  );
-  return { onHand: row.quantity, value: unscaled(row.value, 2) };
-}
 
 /** The share of a cost that falls to a part, to the cent: all of it falls to the whole. */
 export function shareOfCost(part: number, whole: { of: number; cost: Decimal }): Decimal {
@@ -40,12 +23,41 @@ export async function costOfGoing(
   item: StockItem,
   quantity: number,
 ): Promise<Decimal> {
-  const after = await firstInFirstOutAfter(em, item);
-  if (after !== undefined) {
-    const layers = await layersOf(em, keysOf(item).hardwareId, after);
-    return unscaled(costOfOldest(layers, quantity), 2);
-  }
-  const { onHand, value } = await heldOf(em, item);
+  const factsOf = await readValueFacts(em, [item]);
+  return going(factsOf(item), quantity);
+}
+
+/** What a change of what is on hand is worth, signed like it, to the cent. */
+export async function costOfChange(
+  em: EntityManager,
+  item: StockItem,
+  change: number,
+): Promise<Decimal> {
+  const costOf = await costsOfChanges(em, [{ item, change }]);
+  return costOf(item, change);
+}
+
+interface StockChange {
+  item: StockItem;
+  /** Above 0 what was found, below 0 what is gone. */
+  change: number;
+}
+
+/** The same of any number of them, read at once; nothing is read for those that change nothing. */
+export async function costsOfChanges(
+  em: EntityManager,
+  changes: readonly StockChange[],
+): Promise<(item: StockItem, change: number) => Decimal> {
+  const moved = changes.filter(({ change }) => change !== 0).map(({ item }) => item);
+  const factsOf = await readValueFacts(em, moved);
+  return (item, change) => {
+    if (change === 0) return new Decimal(0);
+    return change < 0 ? going(factsOf(item), -change).negated() : coming(factsOf(item), change);
+  };
+}
+
+function going({ layers, onHand, value }: ValueFacts, quantity: number): Decimal {
+  if (layers !== undefined) return unscaled(costOfOldest(layers, quantity), 2);
   return onHand > 0 ? shareOfCost(quantity, { of: onHand, cost: value }) : new Decimal(0);
 }
 
@@ -53,48 +65,10 @@ export async function costOfGoing(
  * What a quantity that was found is worth: as what is there, or, first in, first out, as what came last; with nothing
  * there, what it cost when it was bought.
  */
-export async function costOfComing(
-  em: EntityManager,
-  item: StockItem,
-  quantity: number,
-): Promise<Decimal> {
-  const after = await firstInFirstOutAfter(em, item);
-  if (after !== undefined) {
-    const newest = (await layersOf(em, keysOf(item).hardwareId, after)).at(-1);
-    if (newest)
-      return shareOfCost(quantity, { of: newest.quantity, cost: unscaled(newest.value, 2) });
-  }
-  const { onHand, value } = await heldOf(em, item);
+function coming({ layers, onHand, value, unitCost }: ValueFacts, quantity: number): Decimal {
+  const newest = layers?.at(-1);
+  if (newest)
+    return shareOfCost(quantity, { of: newest.quantity, cost: unscaled(newest.value, 2) });
   if (onHand > 0) return shareOfCost(quantity, { of: onHand, cost: value });
-  const { unitCost } = await describeItem(em, item);
   return shareOfCost(quantity, { of: 1, cost: unitCost });
-}
-
-/** The ledger's last row before first in, first out began; undefined where the item is not valued so. */
-async function firstInFirstOutAfter(
-  em: EntityManager,
-  { hardwareId }: StockItem,
-): Promise<number | undefined> {
-  if (typeof hardwareId !== 'number') return undefined;
-  const workshop = await em.findOne(Workshop, 1);
-  return workshop?.stockValue === 'first in first out' ? workshop.stockValueAfter : undefined;
-}
-
-/** What is left of each receipt since then; what was there before is the first. */
-async function layersOf(
-  em: EntityManager,
-  hardwareId: number | null,
-  after: number,
-): Promise<StockLayer[]> {
-  const rows = await em.execute<(StockLayer & { undoes: number })[]>(
-    `SELECT * FROM (
-       SELECT 0 AS id, COALESCE(SUM(quantity), 0) AS quantity, COALESCE(SUM(value), 0) AS value, 0 AS undoes
-         FROM stock_movement WHERE hardware_id = ? AND id <= ?
-       UNION ALL
-       SELECT id, quantity, value, kind = 'receive' AND quantity < 0 FROM stock_movement
-         WHERE hardware_id = ? AND id > ?)
-     WHERE quantity <> 0 ORDER BY id`,
-    [hardwareId, after, hardwareId, after],
-  );
-  return stockLayers(rows.map((row) => ({ ...row, undoes: row.undoes === 1 })));
 }
