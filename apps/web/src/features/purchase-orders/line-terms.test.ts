@@ -50,7 +50,7 @@ describe('the price of a line', () => {
 });
 
 describe('what is said under a line', () => {
-  it.each([
+  it.each<[string, LineTerms, unknown, string]>([
     ['too few', rivets, 30, 'Sold from 100 in packs of 50: order 100.'],
     [
       'too few where there is no pack',
@@ -88,7 +88,7 @@ describe('what is said under a line', () => {
     ['the last one', rivets, 600, ''],
     ['nothing typed', rivets, '', ''],
     ['no number', rivets, 'some', ''],
-  ] as const)('of %s', (_what, terms, quantity, said) => {
+  ])('of %s', (_what, terms, quantity, said) => {
     expect(termsText(terms, quantity, '', habit)).toBe(said);
   });
 
