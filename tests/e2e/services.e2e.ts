@@ -45,6 +45,20 @@ test('a lot goes out to be split, and comes back as grain and flesh', async () =
   const complaints = watch(page);
   await signInAs(page, hidewright.url, 'owner');
   const lot = await freeLot(page);
+  await goTo(page, '/stockroom/purchase-orders/new');
+  const asked: string[] = [];
+  page.on('request', (request) => asked.push(new URL(request.url()).pathname));
+  await page.getByRole('button', { name: 'Hardware or supplies' }).click();
+  await page.reload();
+  await settled(page);
+  expect(asked).toContain('/api/hardware');
+  expect(asked, 'goods take no lot along').not.toContain('/api/lots');
+  await page.getByRole('button', { name: 'Work on a lot' }).click();
+  await page
+    .getByLabel('Lot that goes out')
+    .locator('option', { hasText: lot.tag })
+    .waitFor({ state: 'attached' });
+
   await goTo(page, `/stockroom/lots/${lot.id}`);
   await page.getByRole('link', { name: 'Have it worked on' }).click();
   await page.waitForURL('**/new?lot=*');

@@ -2,12 +2,15 @@ import { QueryClient } from '@tanstack/react-query';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { hardwareListQuery, hardwarePagesQuery } from '../features/hardware/hardware.queries.ts';
 import { leathersQuery } from '../features/leathers/leathers.queries.ts';
-import { rackQuery } from '../features/lots/lots.queries.ts';
 import {
   hardwareChoicesQuery,
   leatherChoicesQuery,
 } from '../features/patterns/patterns.queries.ts';
-import { awaitedOrdersQuery } from '../features/purchase-orders/purchase-orders.queries.ts';
+import {
+  awaitedOrdersQuery,
+  rackQuery,
+  soldByQuery,
+} from '../features/purchase-orders/purchase-orders.queries.ts';
 import { supplierOffersQuery } from '../features/supplier-offers/supplier-offers.queries.ts';
 import { suppliersQuery } from '../features/suppliers/suppliers.queries.ts';
 
@@ -38,7 +41,8 @@ describe('what is chosen from', () => {
     ['suppliers', () => client().fetchQuery(suppliersQuery())],
     ['offers', () => client().fetchQuery(supplierOffersQuery({ supplierId: 7 }))],
     ['awaited orders', () => client().fetchQuery(awaitedOrdersQuery())],
-    ['the rack', async () => ({ items: await client().fetchQuery(rackQuery()) })],
+    ['what a supplier sells', () => client().fetchQuery(soldByQuery(7))],
+    ['the rack', () => client().fetchQuery(rackQuery())],
   ])('has the oldest of %s too', async (_what, read) => {
     const { items } = await read();
     expect(items.map(({ id }) => id)).toEqual(kept.map(({ id }) => id));

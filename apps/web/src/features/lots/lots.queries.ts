@@ -1,7 +1,6 @@
 import { listLots, readLot, readLotDrawing, readLotSearch } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
-import { everyPage } from '../../lib/every-page.ts';
 
 interface Wanted {
   leatherId?: number | undefined;
@@ -21,19 +20,6 @@ export function lotsQuery(wanted: Wanted = {}) {
       }),
     initialPageParam: '',
     getNextPageParam: (last) => last.next,
-  });
-}
-
-/** Every lot on the rack, to choose one from. */
-export function rackQuery() {
-  return queryOptions({
-    queryKey: ['lots', 'rack'],
-    queryFn: async ({ signal }) => {
-      const { items } = await everyPage((paging) =>
-        call(listLots, { query: { onRack: 'yes', ...paging }, signal }),
-      );
-      return items;
-    },
   });
 }
 

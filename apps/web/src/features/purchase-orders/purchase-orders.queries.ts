@@ -1,5 +1,6 @@
 import {
   listClaims,
+  listLots,
   listPurchaseOrders,
   listReceipts,
   listSupplierOffers,
@@ -48,6 +49,15 @@ export function soldByQuery(supplierId: number) {
     queryFn: ({ signal }) =>
       everyPage((paging) => call(listSupplierOffers, { query: { supplierId, ...paging }, signal })),
     enabled: supplierId > 0,
+  });
+}
+
+/** Every lot on the rack, to choose what goes out to be worked on. */
+export function rackQuery() {
+  return queryOptions({
+    queryKey: ['purchase-orders', 'rack'],
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listLots, { query: { onRack: 'yes', ...paging }, signal })),
   });
 }
 

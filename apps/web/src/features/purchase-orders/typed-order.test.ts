@@ -34,7 +34,7 @@ describe('work on a lot', () => {
   } as const;
 
   it('costs its price per ft² of all that is free, of what is typed, or for the lot', () => {
-    const work = { ...blankService(lot), unitPrice: '1.50' };
+    const work = { ...blankService(lot.id), unitPrice: '1.50' };
     expect(amountOf([work], [lot])).toBe('36.00');
     expect(amountOf([{ ...work, areaMm2: '929030.4' }], [lot])).toBe('15.00');
     expect(amountOf([{ ...work, unitPrice: null, fixedPrice: '22.5' }], [lot])).toBe('22.50');

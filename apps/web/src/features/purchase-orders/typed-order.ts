@@ -34,11 +34,11 @@ export function blankLine(of: 'leather' | 'hardware', goods?: Goods): TypedLine 
 }
 
 /** Work on a lot, with the work still to be said. */
-export function blankService(lot?: FreeLot): TypedService {
+export function blankService(lotId: number = empty): TypedService {
   return {
     of: 'service',
     service: '',
-    lotId: lot?.id ?? empty,
+    lotId,
     areaMm2: null,
     becomesLeatherId: empty,
     unitPrice: null,

@@ -42,7 +42,7 @@ export function Component() {
       <PageHeader title={`Change ${order.number}`} />
       <Card>
         <PurchaseOrderForm
-          {...useOrderBasics(order)}
+          {...useOrderBasics()}
           defaults={typedOf(order)}
           draftKey={`purchase-order-${id}`}
           submitWord="Save"

@@ -9,7 +9,6 @@ import {
   blankLine,
   blankOrder,
   blankService,
-  type FreeLot,
   type Goods,
   type TypedOrder,
 } from '../../../features/purchase-orders/typed-order.ts';
@@ -53,18 +52,18 @@ export function Component() {
 /** An order that was begun from a leather, hardware, a lot or a supplier has it in it. */
 function startWith(
   search: URLSearchParams,
-  { leathers, hardware, lots }: { leathers: Goods[]; hardware: Goods[]; lots: FreeLot[] },
+  { leathers, hardware }: { leathers: Goods[]; hardware: Goods[] },
 ): Partial<TypedOrder> {
   const named = (goods: Goods[], name: string) =>
     goods.filter(({ id }) => String(id) === search.get(name));
-  const supplierId = Number(search.get('supplier'));
+  const [supplierId, lotId] = [Number(search.get('supplier')), Number(search.get('lot'))];
   return {
     ...blankOrder,
     ...(supplierId > 0 && { supplierId }),
     lines: [
       ...named(leathers, 'leather').map((goods) => blankLine('leather', goods)),
       ...named(hardware, 'hardware').map((goods) => blankLine('hardware', goods)),
-      ...lots.filter(({ id }) => String(id) === search.get('lot')).map(blankService),
+      ...(lotId > 0 ? [blankService(lotId)] : []),
     ],
   };
 }

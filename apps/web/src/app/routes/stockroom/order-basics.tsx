@@ -1,12 +1,10 @@
-import type { PurchaseOrder } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
 import { hardwareListQuery } from '../../../features/hardware/hardware.queries.ts';
 import { leathersQuery } from '../../../features/leathers/leathers.queries.ts';
-import type { FreeLot, Goods } from '../../../features/purchase-orders/typed-order.ts';
-import { rackQuery } from '../../../features/lots/lots.queries.ts';
+import type { Goods } from '../../../features/purchase-orders/typed-order.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { choicesOf, hardwareGoods, leatherGoods } from './choices.ts';
@@ -17,7 +15,6 @@ export async function loadOrderBasics(): Promise<void> {
     queryClient.ensureQueryData(suppliersQuery()),
     queryClient.ensureQueryData(leathersQuery()),
     queryClient.ensureQueryData(hardwareListQuery()),
-    queryClient.fetchQuery(rackQuery()),
   ]);
 }
 
@@ -25,21 +22,16 @@ interface OrderBasics {
   suppliers: Choice[];
   leathers: Goods[];
   hardware: Goods[];
-  lots: FreeLot[];
 }
 
-/** With the lots that an order has worked on already, free or not. */
-export function useOrderBasics(order?: PurchaseOrder): OrderBasics {
+export function useOrderBasics(): OrderBasics {
   const { data: suppliers } = useSuspenseQuery(suppliersQuery());
   const { data: leathers } = useSuspenseQuery(leathersQuery());
   const { data: hardware } = useSuspenseQuery(hardwareListQuery());
-  const { data: rack } = useSuspenseQuery(rackQuery());
-  const own = new Set(order?.lines.map(({ service }) => service?.lotId));
   return {
     suppliers: choicesOf(suppliers.items),
     leathers: leatherGoods(leathers.items),
     hardware: hardwareGoods(hardware.items),
-    lots: rack.filter(({ id, freeAreaMm2 }) => freeAreaMm2 !== '0' || own.has(id)),
   };
 }
 

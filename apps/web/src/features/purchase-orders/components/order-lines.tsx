@@ -6,30 +6,23 @@ import { Button } from '../../../components/button.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { soldByQuery } from '../purchase-orders.queries.ts';
-import {
-  amountOf,
-  blankLine,
-  blankService,
-  type FreeLot,
-  type Goods,
-  type TypedLine,
-} from '../typed-order.ts';
+import { amountOf, blankLine, blankService, type Goods, type TypedLine } from '../typed-order.ts';
+import { useFreeLots } from '../use-free-lots.ts';
 import { OrderLine } from './order-line.tsx';
 import { ServiceLine } from './service-line.tsx';
 
 interface OrderLinesProps {
   leathers: readonly Goods[];
   hardware: readonly Goods[];
-  /** What can go out to be worked on. */
-  lots: readonly FreeLot[];
 }
 
 /** What is ordered, line by line, and what it comes to. */
-export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
+export function OrderLines({ leathers, hardware }: OrderLinesProps) {
   const { fields, append, remove } = useFieldArray<{ lines: TypedLine[] }>({ name: 'lines' });
   const { currency } = useWorkshop();
   const offers = useOffers();
   const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
+  const lots = useFreeLots(lines);
   const add = (of: 'leather' | 'hardware') =>
     append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
   return (
@@ -64,14 +57,12 @@ export function OrderLines({ leathers, hardware, lots }: OrderLinesProps) {
         <Button tone="quiet" onClick={() => add('hardware')}>
           <Plus size={18} aria-hidden="true" /> Hardware or supplies
         </Button>
-        {lots.length > 0 && (
-          <Button
-            tone="quiet"
-            onClick={() => append(blankService(), { focusName: `lines.${fields.length}.service` })}
-          >
-            <Plus size={18} aria-hidden="true" /> Work on a lot
-          </Button>
-        )}
+        <Button
+          tone="quiet"
+          onClick={() => append(blankService(), { focusName: `lines.${fields.length}.service` })}
+        >
+          <Plus size={18} aria-hidden="true" /> Work on a lot
+        </Button>
       </div>
       <p className="mt-3 font-semibold">
         Together {currency} {moneyText(amountOf(lines, lots))}

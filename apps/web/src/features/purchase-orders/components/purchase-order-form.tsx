@@ -6,7 +6,7 @@ import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
 import { TextArea } from '../../../components/text-area.tsx';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import type { FreeLot, Goods, TypedOrder } from '../typed-order.ts';
+import type { Goods, TypedOrder } from '../typed-order.ts';
 import { OrderLines } from './order-lines.tsx';
 
 interface PurchaseOrderFormProps {
@@ -14,7 +14,6 @@ interface PurchaseOrderFormProps {
   suppliers: readonly Choice[];
   leathers: readonly Goods[];
   hardware: readonly Goods[];
-  lots: readonly FreeLot[];
   draftKey: string;
   submitWord: string;
   cancelTo: string;
@@ -24,7 +23,7 @@ interface PurchaseOrderFormProps {
 
 /** An order to a supplier as it is typed, with what it comes to. */
 export function PurchaseOrderForm(props: PurchaseOrderFormProps) {
-  const { defaults, suppliers, leathers, hardware, lots, cancelTo, onReload, ...form } = props;
+  const { defaults, suppliers, leathers, hardware, cancelTo, onReload, ...form } = props;
   const { today } = useWorkshop();
   return (
     <Form
@@ -53,7 +52,7 @@ export function PurchaseOrderForm(props: PurchaseOrderFormProps) {
         help="Left empty, it is worked out from the supplier’s days when the order is sent."
       />
       <Stitch />
-      <OrderLines leathers={leathers} hardware={hardware} lots={lots} />
+      <OrderLines leathers={leathers} hardware={hardware} />
       <Stitch />
       <TextArea name="note" label="Note to the supplier" rows={3} optional />
     </Form>

@@ -11,7 +11,8 @@ import { WorkField } from './work-field.tsx';
 
 interface ServiceLineProps {
   at: number;
-  lots: readonly FreeLot[];
+  /** Undefined while they are being read. */
+  lots: readonly FreeLot[] | undefined;
   leathers: readonly Goods[];
   onRemove: () => void;
 }
@@ -42,7 +43,7 @@ export function ServiceLine({ at, lots, leathers, onRemove }: ServiceLineProps) 
         <div className="min-w-0 space-y-3">
           <WorkField name={`${line}.service`} />
         </div>
-        <WhatGoesOut line={line} lots={lots} />
+        {lots ? <WhatGoesOut line={line} lots={lots} /> : <p>Reading what is on the rack…</p>}
         <SelectField
           name={`${line}.becomesLeatherId`}
           label="Becomes"
@@ -84,6 +85,7 @@ function WhatGoesOut({ line, lots }: { line: string; lots: readonly FreeLot[] })
         name={`${line}.lotId`}
         label="Lot that goes out"
         placeholder="Choose a lot"
+        help={lots.length === 0 ? 'Nothing on the rack is free to go out.' : undefined}
         choices={lots.map((each) => ({
           value: each.id,
           label: `${each.tag}, ${free(each)} free, ${each.leatherName}`,
