@@ -72,6 +72,8 @@ const jobHardware = z
     held: count,
     free: z.int(),
     taken: z.int(),
+    /** What the job needs and this may be taken in place of, alone or as a part of a kit. */
+    standsInFor: z.array(z.object({ name: z.string(), inKit: z.string().nullable() })),
   })
   .meta({ id: 'JobHardware' });
 export type JobHardware = z.infer<typeof jobHardware>;
@@ -125,6 +127,8 @@ export const job = z
     die: jobTool.nullable(),
     lots: z.array(jobLot),
     hardware: z.array(jobHardware),
+    /** Of which something is free and nothing is needed, held or taken: it may be taken in place of what is needed. */
+    standIns: z.array(jobHardware),
     steps: z.array(jobStep),
     logs: z.array(benchLog),
     good: count,

@@ -3,6 +3,8 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { Decimal } from 'decimal.js';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
 import type { JobEstimate } from '../job-estimate.ts';
+import { readStandIns } from './stand-ins-for-check.ts';
+import { withoutStoodFor } from './stood-for.ts';
 
 /** What jobs that are not finished still need and do not hold, as the ledger counts: promised and not yet reserved. */
 export interface OwedToJobs {
@@ -52,10 +54,17 @@ export async function readOwedToJobs(em: EntityManager): Promise<OwedToJobs> {
   );
   // Whoever held all of it owes nothing; only for the others does the long ledger have to be read.
   const lacking = jobs.flatMap((job) => lackingOf(job, held));
-  const taken = lacking.length === 0 ? [] : await takenBy(em, lacking);
-  const owed = lacking
+  const standIns = await readStandIns(em, hardwareOf(lacking));
+  const taken = lacking.length === 0 ? [] : await takenBy(em, lacking, standIns.partIds);
+  const missing = lacking
     .map((each) => ({ ...each, quantity: each.quantity - takenBeyond(each, held, taken) }))
     .filter(({ quantity }) => quantity > 0);
+  const short = new Set(missing.map(({ jobId }) => jobId));
+  const needs = neededBy(jobs.filter(({ id }) => short.has(id)));
+  const owed = withoutStoodFor(missing, standIns.of, (which) => {
+    const has = sumOf(held, which, (row) => row.open) + sumOf(taken, which, (row) => row.taken);
+    return has - needs(which);
+  });
   return {
     hardware: (id) => owed.filter(({ hardwareId }) => hardwareId === id),
     leather: (id) => owed.filter(({ leatherId }) => leatherId === id),
@@ -64,6 +73,21 @@ export async function readOwedToJobs(em: EntityManager): Promise<OwedToJobs> {
 
 interface Lacking extends Owed {
   jobId: number;
+}
+
+const hardwareOf = (lacking: readonly Lacking[]): number[] => [
+  ...new Set(lacking.flatMap(({ hardwareId }) => hardwareId ?? [])),
+];
+
+/** How many of some hardware a job asks for itself. */
+function neededBy(jobs: readonly JobRow[]) {
+  const byJob = new Map(
+    jobs.map(({ id, estimate }) => [id, (JSON.parse(estimate) as JobEstimate).hardware]),
+  );
+  return (which: { jobId: number; hardwareId: number }): number =>
+    (byJob.get(which.jobId) ?? [])
+      .filter(({ hardwareId }) => hardwareId === which.hardwareId)
+      .reduce((sum, { quantity }) => sum + quantity, 0);
 }
 
 /** What a job needs beyond all that was ever held for it. */
@@ -104,7 +128,11 @@ function takenBeyond(which: Which, held: readonly HeldRow[], taken: readonly Tak
   return Math.max(0, sumOf(taken, which, (row) => row.taken) - fromHeld);
 }
 
-async function takenBy(em: EntityManager, lacking: readonly Lacking[]): Promise<TakenRow[]> {
+async function takenBy(
+  em: EntityManager,
+  lacking: readonly Lacking[],
+  standInIds: readonly number[],
+): Promise<TakenRow[]> {
   const list = (values: (number | undefined)[]) =>
     JSON.stringify([...new Set(values.filter((value) => value !== undefined))]);
   const jobs = list(lacking.map(({ jobId }) => jobId));
@@ -112,7 +140,7 @@ async function takenBy(em: EntityManager, lacking: readonly Lacking[]): Promise<
     `SELECT job_id, hardware_id, NULL AS leather_id, -SUM(quantity) AS taken FROM stock_movement
     WHERE hardware_id IN (SELECT value FROM json_each(?)) AND job_id IN (SELECT value FROM json_each(?))
     GROUP BY job_id, hardware_id`,
-    [list(lacking.map(({ hardwareId }) => hardwareId)), jobs],
+    [list([...hardwareOf(lacking), ...standInIds]), jobs],
   );
   const ofLeather = await em.execute<TakenRow[]>(
     `SELECT m.job_id, NULL AS hardware_id, l.leather_id, -SUM(m.quantity) AS taken

@@ -13,7 +13,8 @@ import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts
 import { definitionOf, findPattern } from '../../modules/patterns/pattern-versions.ts';
 import { estimateOf } from '../job-estimate.ts';
 import { ticketLogs, ticketSteps } from './ticket-steps.ts';
-import { stockOfJob, ticketHardware, ticketLots } from './ticket-stock.ts';
+import { ticketHardware } from './ticket-hardware.ts';
+import { stockOfJob, ticketLots } from './ticket-stock.ts';
 import { ticketTool } from './ticket-tools.ts';
 
 /** The ticket, with all that the maker needs at the bench. @throws {Problem} 404 */
@@ -96,7 +97,7 @@ async function madeOf(em: EntityManager, job: Job) {
     die: needsDie ? await tool('cutting die') : null,
     plate: needsPlate ? await tool('stamp plate') : null,
     lots: await ticketLots(em, stock, leatherId),
-    hardware: await ticketHardware(em, stock, hardware),
+    ...(await ticketHardware(em, stock, hardware)),
   };
 }
 

@@ -1,7 +1,6 @@
-import type { JobHardware, JobLot } from '@hidewright/contract';
+import type { JobLot } from '@hidewright/contract';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
-import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
 import { Reservation } from '../../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../../modules/stock/stock-balance.entity.ts';
@@ -11,7 +10,7 @@ import { mixesOf } from './lot-mixes.ts';
 type Keyed = { lotId: number | null; hardwareId: number | null };
 
 /** What a job holds and has taken, by what it is about. */
-interface JobStock {
+export interface JobStock {
   held(item: Partial<Keyed>): number;
   taken(item: Partial<Keyed>): number;
   rows: Keyed[];
@@ -81,30 +80,10 @@ export async function ticketLots(
   }));
 }
 
-/** The hardware that the pattern asks for, and whatever else was taken. */
-export async function ticketHardware(
-  em: EntityManager,
-  stock: JobStock,
-  asked: readonly { hardwareId: number; quantity: number }[],
-): Promise<JobHardware[]> {
-  const needed = new Map(asked.map(({ hardwareId, quantity }) => [hardwareId, quantity]));
-  const also = stock.rows.flatMap(({ hardwareId }) => (hardwareId === null ? [] : [hardwareId]));
-  const ids = [...new Set([...needed.keys(), ...also])];
-  const hardware = await em.find(Hardware, { id: { $in: ids } }, { orderBy: { name: 'asc' } });
-  const free = await freeByItem(em, { hardwareId: { $in: ids } });
-  return hardware.map(({ id, name }) => ({
-    hardwareId: id,
-    name,
-    needed: needed.get(id) ?? 0,
-    held: stock.held({ hardwareId: id }),
-    free: free.get(`hardware ${id}`) ?? 0,
-    taken: stock.taken({ hardwareId: id }),
-  }));
-}
-
 type Which = { lotId: { $in: number[] } } | { hardwareId: { $in: number[] } };
 
-async function freeByItem(em: EntityManager, which: Which): Promise<Map<string, number>> {
+/** What is on hand and held for nobody, by `lot 7` or `hardware 3`. */
+export async function freeByItem(em: EntityManager, which: Which): Promise<Map<string, number>> {
   const balances = await em.find(StockBalance, which);
   return new Map(
     balances.map(({ lotId, hardwareId, onHand, reserved }) => [

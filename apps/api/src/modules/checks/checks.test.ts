@@ -129,6 +129,50 @@ describe('Can we make them?', () => {
     ]);
   });
 
+  it('owes a job no more of what it has something else in place of', async () => {
+    const brass = await as('owner')
+      .post('/api/hardware')
+      .send({ name: 'Rivet 9 mm, brass', unitPrice: '0.20' })
+      .expect(201);
+    const { hardwareId } = ready;
+    const standIns = [{ hardwareId: brass.body.id, bothWays: true }];
+    await change(`hardware/${hardwareId}`, { standIns });
+    const big = await agreedQuote(ready, 250);
+    const order = { quoteId: big.id, promisedOn: '2026-12-16', evenIfShort: true };
+    const taken = await as('owner').post('/api/orders').send(order).expect(201);
+    const job = `/api/jobs/${taken.body.job.id}`;
+    const hardware = [
+      { hardwareId, quantity: 250, cost: '42.00' },
+      { hardwareId: brass.body.id, quantity: 12, cost: '2.40' },
+    ];
+    await as('owner').post('/api/receipts').send({ hardware }).expect(201);
+    const ticket = await as('maker').get(job).expect(200);
+    expect(ticket.body.hardware).toHaveLength(1);
+    expect(ticket.body.standIns).toMatchObject([
+      {
+        hardwareId: brass.body.id,
+        needed: 0,
+        free: 12,
+        standsInFor: [{ name: 'Rivet 9 mm', inKit: null }],
+      },
+    ]);
+    const other = { patternId: ready.patternId, quantity: 50, by: '2026-12-18' };
+    const freeNow = async () => rivetsOf(await check([other]), 0)?.freeNow;
+    expect(await freeNow()).toBe('50');
+    const some = { hardwareId: brass.body.id, quantity: 7 };
+    const held = await as('maker').post(`${job}/reservations`).send(some).expect(201);
+    expect(held.body.standIns).toEqual([]);
+    expect(held.body.hardware).toContainEqual(
+      expect.objectContaining({ ...{ hardwareId: brass.body.id, held: 7, needed: 0 } }),
+    );
+    expect(await freeNow()).toBe('57');
+    await as('maker')
+      .post(`${job}/takings`)
+      .send({ hardwareId: brass.body.id, quantity: 12 })
+      .expect(201);
+    expect(await freeNow()).toBe('62');
+  });
+
   it('takes a layout on the lot as drawn at its word, flaws and all', async () => {
     const side = [
       { x: 0, y: 0 },

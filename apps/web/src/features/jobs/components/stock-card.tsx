@@ -12,6 +12,7 @@ import { countText, rackAreaText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
 import { jobQuery } from '../jobs.queries.ts';
+import { standsInText } from '../stand-in-words.ts';
 import { MixNotice } from './mix-notice.tsx';
 import { OffcutBack } from './offcut-back.tsx';
 import { TakeOther } from './take-other.tsx';
@@ -206,8 +207,9 @@ function lotLine(lot: JobLot, say: (areaMm2: string) => string): string {
   return parts.join(' · ');
 }
 
-function hardwareLine({ needed, held, taken, free }: JobHardware): string {
-  const parts = [`${countText(needed)} needed`];
+function hardwareLine(item: JobHardware): string {
+  const { needed, held, taken, free } = item;
+  const parts = [standsInText(item) || `${countText(needed)} needed`];
   if (held > 0) parts.push(`${countText(held)} held`);
   if (taken > 0) parts.push(`${countText(taken)} taken`);
   return [...parts, `${countText(free)} free`].join(' · ');

@@ -9,9 +9,10 @@ import { Form } from '../../../components/form.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { say } from '../../../components/toast.ts';
-import { rackAreaText } from '../../../lib/formatting.ts';
+import { countText, rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useHoldForJob, useTakeForJob } from '../jobs.mutations.ts';
+import { standsInText } from '../stand-in-words.ts';
 import { MixNotice } from './mix-notice.tsx';
 
 const does = {
@@ -33,7 +34,7 @@ export function TakeOther({ job, canTake }: TakeOtherProps) {
   const close = () => setOpen(undefined);
   const kinds = {
     leather: job.lots.length > 0,
-    hardware: job.hardware.length > 0,
+    hardware: job.hardware.length + job.standIns.length > 0,
   };
   const button = (deed: Deed, kind: Kind, word: string) =>
     kinds[kind] && (
@@ -117,9 +118,11 @@ function ChosenMix({ job }: { job: Job }) {
 function MoveHardware(props: MoveProps) {
   const send = useDeed(props);
   const { job, deed } = props;
-  const choices = job.hardware.map((item) => ({
+  const choices = [...job.hardware, ...job.standIns].map((item) => ({
     value: item.hardwareId,
-    label: `${item.name}: ${item.free} free`,
+    label: [`${item.name}: ${countText(item.free)} free`, standsInText(item)]
+      .filter(Boolean)
+      .join(', '),
   }));
   return (
     <Form
