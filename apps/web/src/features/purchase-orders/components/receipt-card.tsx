@@ -26,7 +26,7 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
   const short = receipt.lines.filter((line) => line.marked?.short && line.claimId === null);
   const { freight, duty } = receipt;
   const day = dayText(receipt.receivedOn, today);
-  const title = of ? `Delivery ${of.count}, ${day}` : `Delivery of ${day}`;
+  const title = of ? `Delivery ${of.count}, ${day}` : `${day}: ${whatCame(receipt)}`;
   return (
     <Card
       title={title}
@@ -70,6 +70,12 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
       )}
     </Card>
   );
+}
+
+/** MKT-1 and 2 more: several deliveries of one day are told apart by it. */
+function whatCame({ lines }: Receipt): string {
+  const [first, ...others] = lines.map(({ lotTag, name }) => lotTag ?? name);
+  return [first, ...(others.length > 0 ? [`${others.length} more`] : [])].join(' and ');
 }
 
 function Carriage(props: { freight: string; duty: string; sharedBy: string }) {
