@@ -217,8 +217,9 @@ walk('what came without an order is listed, and what it cost is put right', asyn
   await expectNoOverflow(page);
   await card.getByRole('link', { name: 'MKT-1' }).click();
   await page.getByText('6.047 oz (2.4 mm)').waitFor();
-  await page.getByLabel(/^Weight/).fill('5½');
-  await page.getByRole('button', { name: 'Save', exact: true }).click();
+  const lies = page.getByRole('region', { name: 'Where it lies' });
+  await lies.getByLabel(/^Weight/).fill('5½');
+  await lies.getByRole('button', { name: 'Save' }).click();
   await page.getByText('5.5 oz (2.2 mm)').waitFor();
   await expectNoOverflow(page);
 });
