@@ -8,7 +8,12 @@ import {
   type LoggedStep,
 } from '@hidewright/domain';
 import type { JobStep } from '../../modules/jobs/job-step.entity.ts';
-import { countsPieces, handledAtEnd, handledIn, stepLimits } from '../../modules/jobs/step-limits.ts';
+import {
+  countsPieces,
+  handledAtEnd,
+  handledIn,
+  stepLimits,
+} from '../../modules/jobs/step-limits.ts';
 import type { PastRun } from './past-runs.ts';
 
 type Steps = Extract<PatternDefinition['work'], { kind: 'steps' }>;

@@ -1,5 +1,11 @@
 import type { Learned, PastRun as PastRunReply, PatternDefinition } from '@hidewright/contract';
-import { poolMinutes, poolRejects, practiceFactor, rejectShare, toAtMost } from '@hidewright/domain';
+import {
+  poolMinutes,
+  poolRejects,
+  practiceFactor,
+  rejectShare,
+  toAtMost,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { dayIn } from '../../day-in.ts';
 import { definitionFor, describeDesign } from '../../modules/designs/read-designs.ts';

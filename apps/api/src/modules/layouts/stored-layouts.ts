@@ -61,10 +61,7 @@ export function layoutsFor(context: Layer, asked: readonly LayoutAsked[]): Promi
 }
 
 /** The layout of a strip without an end, found or worked out in the same way. */
-export async function stripLayoutFor(
-  context: Layer,
-  input: LayoutInput,
-): Promise<WorkedLayout> {
+export async function stripLayoutFor(context: Layer, input: LayoutInput): Promise<WorkedLayout> {
   const source = { by: 'outline' as const, input };
   const workOut = () => context.workers.layOut(input);
   const [worked] = await workedOnce(context, [{ source, inputHash: hashOf(source), workOut }]);
