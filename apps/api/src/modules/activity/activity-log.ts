@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import type { Work } from '../../work.ts';
-import { Activity } from './activity.entity.ts';
+import type { Activity } from './activity.entity.ts';
 
 export interface Deed {
   /** What was done, in words that follow a name: "sent quote Q-0241". */
