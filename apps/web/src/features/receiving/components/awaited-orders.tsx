@@ -46,7 +46,7 @@ export function AwaitedOrders({ orders }: { orders: readonly PurchaseOrder[] }) 
         <LinkButton to="/stockroom/receive?order=none" className="min-h-11">
           It came without an order
         </LinkButton>
-        <TextLink to="/stockroom/deliveries">Came so before</TextLink>
+        <TextLink to="/stockroom/deliveries">Earlier deliveries without an order</TextLink>
       </div>
     </div>
   );
