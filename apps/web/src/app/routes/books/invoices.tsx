@@ -1,7 +1,6 @@
 import { invoiceState } from '@hidewright/contract';
 import { useInfiniteQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
@@ -15,6 +14,7 @@ import {
 } from '../../../features/invoices/invoices.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { BooksNav } from './books-nav.tsx';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 /** Nothing is credited yet by this program. */
 const states = invoiceState.options.filter((state) => state !== 'credited');
@@ -55,13 +55,7 @@ export function Component() {
           )
         }
         after={
-          hasNextPage && (
-            <div className="mt-4 text-center">
-              <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-                Show earlier invoices
-              </Button>
-            </div>
-          )
+          <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="invoices" />
         }
       />
     </>

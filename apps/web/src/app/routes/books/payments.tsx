@@ -1,5 +1,4 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
@@ -8,6 +7,7 @@ import { PaymentsTable } from '../../../features/invoices/components/payments-ta
 import { paymentsQuery } from '../../../features/invoices/invoices.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { BooksNav } from './books-nav.tsx';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 export async function loader() {
   await queryClient.ensureInfiniteQueryData(paymentsQuery());
@@ -30,13 +30,7 @@ export function Component() {
           </EmptyState>
         }
         after={
-          hasNextPage && (
-            <div className="mt-4 text-center">
-              <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-                Show earlier payments
-              </Button>
-            </div>
-          )
+          <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="payments" />
         }
       />
     </>

@@ -1,5 +1,4 @@
 import { useInfiniteQuery, useSuspenseQuery } from '@tanstack/react-query';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
@@ -10,6 +9,7 @@ import { ordersQuery } from '../../../features/orders/orders.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { CounterNav } from './counter-nav.tsx';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 export async function loader() {
   await queryClient.ensureInfiniteQueryData(ordersQuery());
@@ -28,13 +28,7 @@ export function Component() {
         rows={data.pages.flatMap((page) => page.items)}
         empty={<NoOrders isOwner={session.person?.role === 'owner'} />}
         after={
-          hasNextPage && (
-            <div className="mt-4 text-center">
-              <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-                Show earlier orders
-              </Button>
-            </div>
-          )
+          <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="orders" />
         }
       />
     </>

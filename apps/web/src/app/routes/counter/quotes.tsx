@@ -1,7 +1,6 @@
 import { quoteStates, type QuoteState } from '@hidewright/contract';
 import { useInfiniteQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useSearchParams } from 'react-router-dom';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
@@ -13,6 +12,7 @@ import { quotesQuery } from '../../../features/quotes/quotes.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { CounterNav } from './counter-nav.tsx';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 function stateIn(search: URLSearchParams): QuoteState | undefined {
   return quoteStates.find((state) => state === search.get('state'));
@@ -47,13 +47,7 @@ export function Component() {
         rows={data.pages.flatMap((page) => page.items)}
         empty={<NoQuotes state={state} isOwner={isOwner} />}
         after={
-          hasNextPage && (
-            <div className="mt-4 text-center">
-              <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-                Show earlier quotes
-              </Button>
-            </div>
-          )
+          <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="quotes" />
         }
       />
     </>

@@ -1,5 +1,4 @@
 import { useSuspenseInfiniteQuery } from '@tanstack/react-query';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
@@ -8,6 +7,7 @@ import { ReceiptCard } from '../../../features/purchase-orders/components/receip
 import { receiptsWithoutOrderQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useRole } from './use-role.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 export async function loader() {
   await queryClient.ensureInfiniteQueryData(receiptsWithoutOrderQuery());
@@ -41,13 +41,7 @@ export function Component() {
           <ReceiptCard key={receipt.id} receipt={receipt} isOwner={isOwner} />
         ))}
       </div>
-      {hasNextPage && (
-        <div className="mt-4 text-center">
-          <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-            Show earlier deliveries
-          </Button>
-        </div>
-      )}
+      <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="deliveries" />
     </>
   );
 }

@@ -1,6 +1,5 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
@@ -12,6 +11,7 @@ import { lotsQuery } from '../../../features/lots/lots.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { StockroomNav } from './stockroom-nav.tsx';
 import { useRole } from './use-role.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 const wanted = (search: URLSearchParams) =>
   search.get('show') === 'all' ? {} : { ours: 'yes' as const };
@@ -49,13 +49,7 @@ export function Component() {
           </EmptyState>
         }
         after={
-          hasNextPage && (
-            <div className="mt-4 text-center">
-              <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-                Show earlier lots
-              </Button>
-            </div>
-          )
+          <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="lots" />
         }
       />
       <p className="mt-4">

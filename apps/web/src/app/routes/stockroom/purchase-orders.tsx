@@ -1,7 +1,6 @@
 import { purchaseOrderStates, type PurchaseOrderState } from '@hidewright/contract';
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
-import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
 import { PageLoading } from '../../../components/loading.tsx';
@@ -14,6 +13,7 @@ import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-
 import { queryClient } from '../../../lib/query-client.ts';
 import { StockroomNav } from './stockroom-nav.tsx';
 import { useRole } from './use-role.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 function stateIn(search: URLSearchParams): PurchaseOrderState | undefined {
   return purchaseOrderStates.find((state) => state === search.get('state'));
@@ -55,13 +55,7 @@ export function Component() {
         rows={data.pages.flatMap((page) => page.items)}
         empty={none}
         after={
-          hasNextPage && (
-            <div className="mt-4 text-center">
-              <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-                Show earlier orders
-              </Button>
-            </div>
-          )
+          <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="orders" />
         }
       />
       <p className="mt-5">

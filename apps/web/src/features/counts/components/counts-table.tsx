@@ -1,7 +1,6 @@
 import type { CountCard } from '@hidewright/contract';
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
-import { Button } from '../../../components/button.tsx';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
@@ -10,6 +9,7 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { instantText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { countsQuery } from '../counts.queries.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 const columnsFor = ({ timeZone }: Workshop): Column<CountCard>[] => [
   {
@@ -68,13 +68,7 @@ export function CountsTable() {
         </EmptyState>
       }
       after={
-        hasNextPage && (
-          <div className="mt-4 text-center">
-            <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-              Show earlier sheets
-            </Button>
-          </div>
-        )
+        <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="sheets" />
       }
     />
   );

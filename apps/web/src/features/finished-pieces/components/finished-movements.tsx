@@ -1,7 +1,6 @@
 import type { FinishedMovement } from '@hidewright/contract';
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
-import { Button } from '../../../components/button.tsx';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
@@ -9,6 +8,7 @@ import { countText, instantText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { finishedMovementsQuery } from '../finished-pieces.queries.ts';
 import { movedWords } from '../finished-words.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 function columnsFor(
   { currency, timeZone }: Workshop,
@@ -59,15 +59,7 @@ export function FinishedMovements({ id }: { id: number }) {
       rowId={(row) => row.id}
       columns={columns}
       empty={<EmptyState title="Nothing has moved yet." />}
-      after={
-        hasNextPage && (
-          <div className="mt-4 text-center">
-            <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-              Show earlier ones
-            </Button>
-          </div>
-        )
-      }
+      after={<ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="ones" />}
     />
   );
 }

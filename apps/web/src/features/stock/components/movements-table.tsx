@@ -1,7 +1,6 @@
 import type { StockMovement } from '@hidewright/contract';
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
-import { Button } from '../../../components/button.tsx';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
@@ -10,6 +9,7 @@ import { instantText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { movementWords, signedText } from '../movement-words.ts';
 import { movementsQuery, type Asked } from '../stock.queries.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 const itemColumn: Column<StockMovement> = {
   id: 'item',
@@ -97,13 +97,7 @@ export function MovementsTable({ item, mixed = false, sheetAddress }: MovementsT
         </EmptyState>
       }
       after={
-        hasNextPage && (
-          <div className="mt-4 text-center">
-            <Button busy={isFetchingNextPage} onClick={() => void fetchNextPage()}>
-              Show earlier movements
-            </Button>
-          </div>
-        )
+        <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="movements" />
       }
     />
   );
