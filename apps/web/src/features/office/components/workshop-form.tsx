@@ -69,7 +69,6 @@ export function WorkshopForm({
         label="Square feet are shown in"
         choices={areaSteps}
         help="They are kept exactly as they were measured."
-        short
       />
       <SelectField name="lengthUnit" label="Lengths are typed in" choices={lengthUnits} short />
       <SelectField
