@@ -32,6 +32,8 @@ async function addWrap(page: Page): Promise<string> {
   const snap = { name: 'Snap', kind: 'hardware', unitPrice: '0.24' };
   const hardwareId = await add(page, 'hardware', snap);
   await add(page, 'hardware', { ...snap, name: 'Ring', unitPrice: '1' });
+  const thread = { name: 'Thread', kind: 'supplies', unit: 'm', unitPrice: '0.03' };
+  await add(page, 'hardware', thread);
   const definition = {
     layoutBy: 'hand count',
     outline: null,
@@ -64,6 +66,11 @@ async function add(page: Page, what: string, data: object): Promise<number> {
 
 async function describePattern(page: Page, address: string): Promise<void> {
   await visit(page, `${address}/change`);
+  await keyboardAlone.press(page.getByRole('button', { name: 'Hardware from the list' }));
+  const thread = page.getByLabel('Hardware', { exact: true }).nth(1);
+  await keyboardAlone.choose(thread, 'Thread, 0.03 per m');
+  await page.getByLabel('How many', { exact: true }).nth(1).fill('30');
+  await keyboardAlone.choose(page.getByLabel('Counted', { exact: true }).nth(1), 'for 100 pieces');
   await open(page, 'Dye, thread, glue');
   await keyboardAlone.press(page.getByRole('button', { name: 'Another supply' }));
   await page.getByLabel('Supply 1', { exact: true }).fill('Beeswax');
@@ -86,6 +93,7 @@ async function describePattern(page: Page, address: string): Promise<void> {
 
   await page.waitForURL(address);
   await page.getByText('Beeswax, 1.20 for 100 pieces').waitFor();
+  await page.getByText('30 m of Thread, for 100 pieces').waitFor();
   await page.getByText('With a ring: 1 × Ring in place of Snap').waitFor();
   await page.getByText('lies at most 30 min').waitFor();
   await open(page, 'One at a time or in batches?');

@@ -1,3 +1,4 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
@@ -28,13 +29,15 @@ export const countLine = z
     /** What hangs or stands on it. */
     tag: z.string(),
     name: z.string(),
+    /** What one of it is; null for a lot. */
+    unit: z.enum(hardwareUnits).nullable(),
     form: z.string().nullable(),
     place: z.string(),
     /** Found there, although the books had it elsewhere. */
     added: z.boolean(),
     /** Of a lot, as measured. */
     countedAreaMm2: z.string().nullable(),
-    /** Of hardware, in pieces. */
+    /** Of hardware, in its unit. */
     countedQuantity: z.int().nullable(),
     /** It hangs there and was not measured again: its area stays as it is. */
     unmeasured: z.boolean(),

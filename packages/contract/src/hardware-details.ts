@@ -1,20 +1,7 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { choice, id, lengthBetween, optionalLine, positiveCount } from './fields.ts';
-
-/** What one of it is. All are counted whole. */
-export const hardwareUnits = [
-  'piece',
-  'pair',
-  'set',
-  'm',
-  'ml',
-  'g',
-  'sheet',
-  'roll',
-  'bottle',
-] as const;
-export type HardwareUnit = (typeof hardwareUnits)[number];
 
 const kitPart = z.strictObject({
   hardwareId: choice('Choose a part.'),

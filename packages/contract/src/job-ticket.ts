@@ -1,3 +1,4 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { count, day, id, instant, paperNumber, version } from './fields.ts';
 import { layout } from './layouts.ts';
@@ -68,6 +69,7 @@ const jobHardware = z
   .object({
     hardwareId: id,
     name: z.string(),
+    unit: z.enum(hardwareUnits),
     needed: count,
     held: count,
     free: z.int(),

@@ -1,3 +1,4 @@
+import { hardwarePers } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { design } from './designs.ts';
@@ -103,6 +104,8 @@ export const learned = z
       z.object({
         hardwareId: id,
         name: z.string(),
+        /** What the pattern counts it for, and so this does: good pieces, or runs. */
+        per: z.enum(hardwarePers),
         said: count,
         found: workedOut.nullable(),
         saidLossPercent: workedOut,

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { hardwarePers, hardwareUnits } from '@hidewright/domain';
 import { endpoint } from './endpoint.ts';
 import { confidential } from './confidential.ts';
 import {
@@ -18,11 +19,15 @@ import { onceSound } from './once-sound.ts';
 import { refineOptions, refineSteps } from './pattern-rules.ts';
 import { workPlan } from './work-plan.ts';
 
-const perPiece = positiveCount.max(1000, 'Enter at most 1,000 for each piece.');
+const perPiece = positiveCount.max(10_000, 'Enter at most 10,000.');
+const per = z.enum(hardwarePers, 'Choose what it is counted per.');
 
 const hardwareLine = z.strictObject({
   hardwareId: id,
+  /** Whole units for each piece, or for what `per` says. */
   perPiece,
+  /** For each piece, where nobody said. */
+  per: per.optional(),
   /** Needed for every piece that reaches this step, counted from 0; else for the pieces ordered. */
   fromStep: z.int('Choose a step.').min(0).max(39).nullish(),
   /** Layers of leather that it is set through; two where nobody said. */
@@ -41,7 +46,7 @@ const supplyLine = z.strictObject({
   name: line(60, 'Enter what is used up, such as edge dye.'),
   /** What it costs for each piece, for 100 pieces, or for the run. */
   cost: confidential(unitPrice),
-  per: z.enum(['piece', 'hundred', 'run'], 'Choose what it is counted per.'),
+  per,
 });
 
 /** The same piece with other hardware, for the customer to choose. */
@@ -124,7 +129,9 @@ export const pattern = z
       z.object({
         hardwareId: id,
         name: z.string(),
+        unit: z.enum(hardwareUnits),
         perPiece: z.int(),
+        per,
         /** What speaks against setting it through this leather, in sentences. */
         remarks: z.array(z.string()),
       }),

@@ -1,3 +1,4 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
@@ -120,6 +121,8 @@ export const purchaseLine = z
     hardwareId: id.nullable(),
     /** Of a service, the work and the lot: Dyeing of T-0012, Oak tan natural. */
     name: z.string(),
+    /** What one of it is; null where it is leather. */
+    unit: z.enum(hardwareUnits).nullable(),
     service: service.nullable(),
     /** Of leather: what was ordered and what came. */
     areaMm2: z.string().nullable(),

@@ -4,6 +4,7 @@ export {
   readDecimal,
   readWhole,
   toAtMost,
+  upToWhole,
   toPlaces,
   toText,
 } from './numbers/decimal-text.ts';
@@ -85,7 +86,8 @@ export * from './work/time-study.ts';
 export * from './tooling/plate-advice.ts';
 export * from './tooling/plate-choice.ts';
 
-export type * from './costing/run-input.ts';
+export * from './costing/run-input.ts';
+export { unitsFor } from './costing/hardware-counts.ts';
 export { hourlyKinds } from './costing/cost-lines.ts';
 export type { CostKind, CostLine } from './costing/cost-lines.ts';
 export type { RunCost } from './costing/cost-run.ts';
@@ -132,6 +134,7 @@ export * from './stock/best-buy.ts';
 
 export * from './hardware/kit-prices.ts';
 export * from './hardware/count-by-weight.ts';
+export * from './hardware/units.ts';
 export * from './hardware/post-fit.ts';
 
 export * from './buying/share-carriage.ts';

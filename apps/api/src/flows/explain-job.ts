@@ -150,6 +150,7 @@ async function explainHardware(
   numbers: BreakNumbers,
 ): Promise<BoughtDifference[]> {
   const moved = await em.find(StockMovement, { jobId: job.id, hardwareId: { $ne: null } });
+  const share = new Exact(job.good).div(job.quantity);
   return hardware.flatMap(({ hardwareId, quantity }, at) => {
     const own = moved.filter((each) => each.hardwareId === hardwareId);
     // A quote of before there were options names no numbers; its lines stand in the same order.
@@ -160,7 +161,7 @@ async function explainHardware(
     const parts = boughtVariances(
       {
         saidQuantity: new Exact(quantity),
-        saidForMade: new Exact(quantity).times(job.good).div(job.quantity),
+        saidForMade: new Exact(quantity).times(kind.per === 'run' ? 1 : share),
         wasQuantity: new Exact(own.reduce((sum, each) => sum - each.quantity, 0)),
         saidPrice: new Exact(kind.unitPrice),
         saidCost: saidCost(numbers, 'hardware', kind.name),

@@ -96,3 +96,34 @@ describe('a kit on a pattern', () => {
     expect(three.hardware[0]?.remarks[1]).toContain('Three layers');
   });
 });
+
+describe('supplies that are kept in stock', () => {
+  it('are counted by the hundred, checked, held, and learned in the same measure', async () => {
+    const dye = await add({ name: 'Edge dye', kind: 'supplies', unit: 'ml', unitPrice: '0.04' });
+    const hardware = [{ hardwareId: dye, quantity: 40 }];
+    await owner().post('/api/receipts').send({ hardware }).expect(201);
+    await changePattern(() => ({
+      hardware: [{ hardwareId: dye, perPiece: 45, per: 'hundred' }],
+    }));
+    const quote = await agreedQuote(ready, 50);
+    const { body } = await owner().get(`/api/quotes/${quote.id}/check?quantity=50`).expect(200);
+    const said = body.answers.find((answer: { name: string }) => answer.name === 'Edge dye');
+    // 22.5 ml are counted as 23.
+    expect(said).toMatchObject({ about: 'supplies', needed: '23', freeNow: '23', short: '0' });
+    const ticket = await ticketOf(ready, await takenOn(ready, 50));
+    expect(ticket.hardware).toMatchObject([{ name: 'Edge dye', needed: 23, held: 23 }]);
+    const taking = { hardwareId: dye, quantity: 25 };
+    await owner().post(`/api/jobs/${ticket.id}/takings`).send(taking).expect(201);
+    await owner().post(`/api/jobs/${ticket.id}/finish`).send({ good: 50 }).expect(200);
+    const learned = await owner().get(`/api/patterns/${ready.patternId}/learned`).expect(200);
+    expect(learned.body.hardware).toMatchObject([
+      {
+        name: 'Edge dye',
+        per: 'hundred',
+        said: 45,
+        found: '50',
+        losses: { needed: 23, taken: 25 },
+      },
+    ]);
+  });
+});

@@ -77,12 +77,12 @@ function pricedIn(
 /** A line of the pattern's hardware at today's price, a kit as its parts; none where the kind is gone. */
 export function hardwareLine(
   kinds: Kinds,
-  { hardwareId, perPiece, fromStep, lossPercent }: Line,
+  { hardwareId, perPiece, per, fromStep, lossPercent }: Line,
 ): RunHardware[] {
   const kind = kinds.get(hardwareId);
   if (kind === undefined) return [];
   const { name, unitPrice, parts } = kind;
-  const line = { perPiece, fromStep, lossPercent };
+  const line = { perPiece, per, fromStep, lossPercent };
   if (parts.length === 0) return [{ ...line, hardwareId, name, unitPrice }];
   return parts.map(({ quantity, ...part }) => ({
     ...line,

@@ -1,7 +1,13 @@
 import { InvalidInput } from '../errors/domain-error.ts';
 import { readDecimal, readWhole } from '../numbers/decimal-text.ts';
 import { checkWorkPlan } from '../work/work-plan.ts';
-import type { Break, PriceRule, RunHardware, RunInput } from './run-input.ts';
+import {
+  hardwarePers,
+  type Break,
+  type PriceRule,
+  type RunHardware,
+  type RunInput,
+} from './run-input.ts';
 
 const mostMoney = 1_000_000_000;
 const mostPieces = 100_000;
@@ -60,9 +66,11 @@ function checkMaterials(input: RunInput): void {
 
 function checkHardware(lines: readonly RunHardware[], field: string, { work }: RunInput): void {
   const steps = work.kind === 'steps' ? work.steps.length : 1;
-  lines.forEach(({ unitPrice, perPiece, fromStep, lossPercent }, at) => {
+  lines.forEach(({ unitPrice, perPiece, per = 'piece', fromStep, lossPercent }, at) => {
     checkMoney(unitPrice, `${field}.${at}.unitPrice`, 4);
     readWhole(perPiece, `${field}.${at}.perPiece`, 1, 1_000_000);
+    if (!hardwarePers.includes(per))
+      throw new InvalidInput(`${field}.${at}.per`, `Count it by ${hardwarePers.join(', ')}.`);
     if (fromStep !== null && fromStep !== undefined) {
       readWhole(fromStep, `${field}.${at}.fromStep`, 0, steps - 1);
     }

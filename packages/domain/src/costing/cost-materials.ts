@@ -1,7 +1,6 @@
 import type { Decimal } from 'decimal.js';
-import { type DecimalText, Exact, toAtMost, toPlaces } from '../numbers/decimal-text.ts';
+import { type DecimalText, Exact, toAtMost, toPlaces, upToWhole } from '../numbers/decimal-text.ts';
 import { mm2ToFootage } from '../units/footage.ts';
-import { sharesReaching } from '../work/bench-minutes.ts';
 import type { CostLines } from './cost-lines.ts';
 import type { RunHardware, RunInput, RunSupply } from './run-input.ts';
 
@@ -32,28 +31,12 @@ export function addMaterials(lines: CostLines, input: RunInput, taken: Taken): v
   for (const supply of input.supplies ?? []) addSupply(lines, supply, taken.quantity);
 }
 
-/**
- * Units of each line of hardware: per piece ordered, or per piece that reaches the step from which it
- * is needed, on average and rounded up; and so many more as are lost themselves.
- */
-export function hardwareCounts(input: RunInput, quantity: number, cut: number): number[] {
-  const shares = sharesReaching(input.work);
-  return input.hardware.map(({ perPiece, fromStep, lossPercent }) => {
-    const reaching =
-      fromStep === null || fromStep === undefined
-        ? new Exact(quantity)
-        : Exact.max(quantity, upTo(new Exact(cut).times(shares[fromStep] ?? 1)));
-    const sound = new Exact(100).minus(lossPercent ?? '0').div(100);
-    return upTo(reaching.times(perPiece).div(sound)).toNumber();
-  });
-}
-
 /** What must be bought whole for so much leather; null where a whole one is not known. */
 export function boughtWhole({ leather, minorDigits }: RunInput, area: Decimal): BoughtWhole | null {
   if (!leather.whole) return null;
   const { form, areaMm2, usablePercent } = leather.whole;
   const usable = new Exact(areaMm2).times(usablePercent).div(100);
-  const count = upTo(area.div(usable)).toNumber();
+  const count = upToWhole(area.div(usable)).toNumber();
   const bought = new Exact(areaMm2).times(count);
   const amount = mm2ToFootage(bought).times(leather.pricePerFt2);
   return { count, form, areaMm2: toAtMost(bought, 3), amount: toPlaces(amount, minorDigits) };
@@ -73,21 +56,19 @@ function addLeather(lines: CostLines, input: RunInput, { containers, area }: Tak
   );
 }
 
+const perWords = { piece: 'for each piece', hundred: 'for 100 pieces', run: 'for the run' };
+
 function hardwareWorkings(hardware: RunHardware, quantity: number, count: number): string {
-  const { perPiece, unitPrice } = hardware;
+  const { perPiece, per = 'piece', unitPrice } = hardware;
+  if (per !== 'piece') return `${count} at ${unitPrice}: ${perPiece} ${perWords[per]}`;
   return count === perPiece * quantity
     ? `${perPiece} per piece × ${quantity} at ${unitPrice}`
     : `${count} at ${unitPrice}: ${perPiece} for every piece that comes so far, and for losses`;
 }
 
-const supplyWords = { piece: 'for each piece', hundred: 'for 100 pieces', run: 'for the run' };
-
 function addSupply(lines: CostLines, supply: RunSupply, quantity: number): void {
   const { name, unitPrice, per, quantity: used } = supply;
   const times = per === 'run' ? new Exact(1) : new Exact(quantity).div(per === 'piece' ? 1 : 100);
   const amount = times.times(used).times(unitPrice);
-  lines.add('supplies', name, amount, `${used} ${supplyWords[per]} at ${unitPrice}`);
+  lines.add('supplies', name, amount, `${used} ${perWords[per]} at ${unitPrice}`);
 }
-
-// The 20th place keeps a division's last digit from costing a piece.
-const upTo = (value: Decimal): Decimal => value.toDecimalPlaces(20).ceil();

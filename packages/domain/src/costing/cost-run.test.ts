@@ -45,6 +45,20 @@ describe('what a run costs', () => {
     ]);
   });
 
+  it('counts what is kept in stock by the hundred and for the run too, in whole units', () => {
+    const hardware = [
+      { name: 'Edge dye', unitPrice: '0.04', perPiece: 45, per: 'hundred' as const },
+      { name: 'Thread', unitPrice: '6.10', perPiece: 1, per: 'hundred' as const, fromStep: 0 },
+      { name: 'Carton', unitPrice: '1.20', perPiece: 3, per: 'run' as const },
+      { name: 'Glue', unitPrice: '0.02', perPiece: 9, per: 'run' as const, lossPercent: '10' },
+    ];
+    const { cutCount, hardwareCounts } = costRun({ ...run, hardware }, 150);
+    // 150 pieces at 45 ml for 100 are 67.5 ml; more than 100 pieces are cut, and a second spool is begun.
+    expect(cutCount).toBeGreaterThan(150);
+    expect(hardwareCounts).toEqual([68, Math.ceil(cutCount / 100), 3, 10]);
+    expect(amounts({ ...run, hardware })).toMatchObject({ 'Edge dye': '1.80', Carton: '3.60' });
+  });
+
   it('counts supplies for each piece, for a hundred, and for the run', () => {
     const supplies = [
       { name: 'Thread', unitPrice: '0.04', per: 'piece' as const, quantity: '1.5' },

@@ -4,7 +4,8 @@ import { type DecimalText, Exact, toAtMost } from '../numbers/decimal-text.ts';
 import { type CutPlan, planCut } from '../rejects/plan-cut.ts';
 import { type BenchMinutes, benchMinutes, goodShare } from '../work/bench-minutes.ts';
 import { addHours } from './cost-hours.ts';
-import { addMaterials, boughtWhole, type BoughtWhole, hardwareCounts } from './cost-materials.ts';
+import { addMaterials, boughtWhole, type BoughtWhole } from './cost-materials.ts';
+import { hardwareCounts } from './hardware-counts.ts';
 import { type CostLine, CostLines } from './cost-lines.ts';
 import type { RunInput } from './run-input.ts';
 

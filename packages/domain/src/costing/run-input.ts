@@ -38,13 +38,20 @@ export interface RunLeather {
   whole?: { form: string; areaMm2: DecimalText; usablePercent: DecimalText } | null | undefined;
 }
 
+/** What hardware and supplies are counted for: thread and dye last for many pieces. */
+export const hardwarePers = ['piece', 'hundred', 'run'] as const;
+export type HardwarePer = (typeof hardwarePers)[number];
+
 export interface RunHardware {
   /** the shop's own number of it, passed through */
   hardwareId?: number | undefined;
   name: string;
   /** up to 4 places */
   unitPrice: DecimalText;
+  /** whole units for each piece, or for what `per` says */
   perPiece: number;
+  /** what the units are counted for: each piece where nobody said */
+  per?: HardwarePer | undefined;
   /** needed for every piece that reaches this step, counted from 0; else for the pieces ordered */
   fromStep?: number | null | undefined;
   /** of the hardware itself that is spoiled, per cent */
@@ -55,7 +62,7 @@ export interface RunHardware {
 export interface RunSupply {
   name: string;
   unitPrice: DecimalText;
-  per: 'piece' | 'hundred' | 'run';
+  per: HardwarePer;
   /** units used for each piece, for 100 pieces, or for the run */
   quantity: DecimalText;
 }

@@ -78,3 +78,8 @@ export function toPlaces(value: Decimal, places: number): DecimalText {
 export function toAtMost(value: Decimal, places: number): DecimalText {
   return toText(value.toDecimalPlaces(places, Decimal.ROUND_HALF_UP));
 }
+
+/** The next whole number up; the 20th place keeps 9 / 0.3, 30.000…01 by a division's last digit, from being 31. */
+export function upToWhole(value: Decimal): Decimal {
+  return value.toDecimalPlaces(20).ceil();
+}

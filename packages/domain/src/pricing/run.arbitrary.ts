@@ -41,6 +41,7 @@ export const aFullRun: fc.Arbitrary<RunInput> = fc.record({
       name: fc.constant('Rivet'),
       unitPrice: money(1, 3),
       perPiece: fc.integer({ min: 1, max: 4 }),
+      per: fc.constantFrom('piece' as const, 'hundred' as const, 'run' as const),
       fromStep: fc.constantFrom(null, 0, 1),
       lossPercent: fc.integer({ min: 0, max: 10 }).map(String),
     }),

@@ -1,5 +1,5 @@
 import { InvalidInput } from '../errors/domain-error.ts';
-import { Exact, readWhole } from '../numbers/decimal-text.ts';
+import { Exact, readWhole, upToWhole } from '../numbers/decimal-text.ts';
 
 function readGoodShare(value: unknown, field: string): number {
   if (typeof value !== 'number' || !(value > 0) || !(value <= 1)) {
@@ -30,9 +30,7 @@ export function plainAllowance(good: number, rate: number): number {
   return ceilOf(new Exact(readWhole(good, 'good')).div(readGoodShare(rate, 'rate')));
 }
 
-// The 20th place keeps 9 / 0.3 (30.000…01 by a division's last digit) from costing a piece.
-const ceilOf = (value: InstanceType<typeof Exact>): number =>
-  value.toDecimalPlaces(20).ceil().toNumber();
+const ceilOf = (value: InstanceType<typeof Exact>): number => upToWhole(value).toNumber();
 
 /**
  * Rounds a cut count up to whole containers (panels, strips or rows).

@@ -1,3 +1,4 @@
+import type { HardwareUnit } from '../hardware/units.ts';
 import type { DecimalText } from '../numbers/decimal-text.ts';
 import type { Bench, WorkPart } from '../promise/bench-time.ts';
 import type { Day } from '../promise/day.ts';
@@ -29,11 +30,13 @@ export interface StandInStock {
   parts: readonly { hardwareId: number; quantity: number }[];
 }
 
-/** Hardware or supplies, in pieces. */
+/** Hardware or supplies, in their units. */
 export interface ItemStock {
   hardwareId: number;
   name: string;
   kind: 'hardware' | 'supplies';
+  /** what one of it is; a piece where nobody said */
+  unit?: HardwareUnit;
   /** the customer brings it: it is never bought */
   fromCustomer?: boolean;
   /** in the order in which they are offered; their parts are among the shop's items */

@@ -1,6 +1,7 @@
 import type { Decimal } from 'decimal.js';
 import { Exact, toAtMost } from '../numbers/decimal-text.ts';
 import { countWords } from '../numbers/count-words.ts';
+import { countedWords } from '../hardware/units.ts';
 import type { Day } from '../promise/day.ts';
 import type { ItemFacts, Standing } from './check-items.ts';
 import type { LeatherFacts, LotTaken } from './check-leather.ts';
@@ -20,7 +21,7 @@ const mm2 = (thousandths: number): Decimal => new Exact(thousandths).div(1000);
 /** What to take, or what is short and what mends it; a sentence or more, for the maker: never a price. */
 export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): string {
   const { needed, now, free, short } = standing;
-  const pieces = (count: number) => countWords(count);
+  const pieces = countedIn(item);
   if (item.fromCustomer) return customerWords({ item, ...standing }, say);
   if (short === 0) {
     if (now === needed) return `${item.name}: take ${pieces(needed)} of ${pieces(free)} free.`;
@@ -35,10 +36,17 @@ export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): strin
   ].join(' ');
 }
 
-function buyWords({ buying: { terms } }: ItemFacts['item'], missing: number): string {
+const countedIn =
+  ({ unit = 'piece' }: ItemFacts['item']) =>
+  (count: number | string) =>
+    countedWords(count, unit);
+
+function buyWords(item: ItemFacts['item'], missing: number): string {
+  const { terms } = item.buying;
   const toBuy = amountToBuy(terms, String(missing));
   const [count, size] = [packsOf(terms, toBuy.quantity), Number(terms.multiple)];
-  const amount = count === null ? countWords(toBuy.quantity) : packs(count, size);
+  const amount =
+    count === null ? countedIn(item)(toBuy.quantity) : packs(count, countedIn(item)(size));
   return `Buy ${amount}${breakWords(toBuy)}, or receive them if they are here.`;
 }
 
@@ -49,13 +57,14 @@ const breakWords = ({ quantity, plain }: ToBuy): string =>
 /** Of what the customer brings, nothing is bought: they are asked for it. */
 function customerWords({ item, ...standing }: ItemFacts, say: Say): string {
   const { needed, now, short } = standing;
+  const counted = countedIn(item);
   const head = `${item.name}, from the customer:`;
   if (short === 0) {
     return now === needed
-      ? `${head} ${countWords(needed)} of theirs are here.`
-      : `${head} ${countWords(now)} of ${countWords(needed)} are here. The rest ${comes(standing, say)}, in time.`;
+      ? `${head} ${counted(needed)} of theirs are here.`
+      : `${head} ${counted(now)} of ${counted(needed)} are here. The rest ${comes(standing, say)}, in time.`;
   }
-  const missing = `${head} ${countWords(needed)} needed, ${countWords(now)} here, ${countWords(short)} missing.`;
+  const missing = `${head} ${counted(needed)} needed, ${counted(now)} here, ${counted(short)} missing.`;
   const ask = `Ask the customer for ${short === 1 ? 'it' : 'them'}, and receive ${short === 1 ? 'it' : 'them'} here.`;
   return [missing, ask, ...standInWords({ item, ...standing })].join(' ');
 }
@@ -70,8 +79,8 @@ function standInWords({ couldStandIn, short }: ItemFacts): string[] {
   return [`${what.join(' and ')} can stand in for ${forWhat}, if you choose so.`];
 }
 
-const packs = (count: number, size: number): string =>
-  `${countWords(count)} ${count === 1 ? 'pack' : 'packs'} of ${countWords(size)}`;
+const packs = (count: number, size: string): string =>
+  `${countWords(count)} ${count === 1 ? 'pack' : 'packs'} of ${size}`;
 
 /** @see hardwareWords */
 export function leatherWords(facts: LeatherFacts, say: Say): string {

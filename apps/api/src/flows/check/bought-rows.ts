@@ -1,3 +1,4 @@
+import type { HardwareUnit } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { Leather } from '../../modules/leathers/leather.entity.ts';
 import type { BoughtRow } from '../order-suggestions/item-terms.ts';
@@ -28,12 +29,13 @@ interface BoughtKind extends BoughtRow {
   of: 'hardware';
   name: string;
   kind: 'hardware' | 'supplies';
+  unit: HardwareUnit;
   from_customer: number;
 }
 
 export function boughtKinds(em: EntityManager, ids: readonly number[]): Promise<BoughtKind[]> {
   return em.execute<BoughtKind[]>(
-    `SELECT 'hardware' AS "of", id, name, unit_price AS price, pack_size, supplier_id, NULL AS whole_area, kind,
+    `SELECT 'hardware' AS "of", id, name, unit_price AS price, pack_size, supplier_id, NULL AS whole_area, kind, unit,
       from_customer
     FROM hardware WHERE id IN (SELECT value FROM json_each(?)) ORDER BY id`,
     [JSON.stringify(ids)],

@@ -40,6 +40,7 @@ export async function loadShopStock(
       hardwareId: kind.id,
       name: kind.name,
       kind: kind.kind,
+      unit: kind.unit,
       fromCustomer: kind.from_customer === 1,
       standIns: standIns.of(kind.id),
       ...poolOf(kind.id, free, owed, onOrder({ hardwareId: kind.id })),

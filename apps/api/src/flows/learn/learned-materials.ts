@@ -1,5 +1,14 @@
 import type { Learned, PatternDefinition } from '@hidewright/contract';
-import { goodShare, poolLeather, poolLosses, toAtMost, type Layout } from '@hidewright/domain';
+import {
+  goodShare,
+  poolLeather,
+  poolLosses,
+  toAtMost,
+  unitsFor,
+  upToWhole,
+  type HardwarePer,
+  type Layout,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
@@ -47,6 +56,24 @@ function perGood(
   return good === 0 ? null : toAtMost(sum.div(good), places);
 }
 
+/** What was taken of it, in the measure that the pattern counts it by. */
+function foundPer(
+  per: HardwarePer,
+  runs: readonly PastRun[],
+  takenBy: (job: number) => number | null,
+): string | null {
+  if (per !== 'run') {
+    const pieces = per === 'hundred' ? 100 : 1;
+    return perGood(runs, ({ job }) => timesOf(takenBy(job.id), pieces), 3);
+  }
+  const taken = runs.flatMap(({ job }) => takenBy(job.id) ?? []);
+  const sum = taken.reduce((all, each) => all + each, 0);
+  return taken.length === 0 ? null : toAtMost(new Decimal(sum).div(taken.length), 3);
+}
+
+const timesOf = (taken: number | null, times: number): number | null =>
+  taken === null ? null : taken * times;
+
 async function saidLeather(
   em: EntityManager,
   definition: PatternDefinition,
@@ -72,12 +99,13 @@ async function hardwareOf(
     hardwareId: { $in: ids },
   });
   return definition.hardware.map((line) => {
-    const { hardwareId, perPiece } = line;
+    const { hardwareId, perPiece, per = 'piece' } = line;
     return {
       hardwareId,
       name: kinds.find(({ id }) => id === hardwareId)?.name ?? '',
+      per,
       said: perPiece,
-      found: perGood(runs, ({ job }) => takenFor(moved, job.id, hardwareId), 3),
+      found: foundPer(per, runs, (job) => takenFor(moved, job, hardwareId)),
       saidLossPercent: line.lossPercent ?? '0',
       losses: poolLosses(runs.flatMap((run) => fitted(run, line, moved))),
     };
@@ -95,14 +123,14 @@ function leatherOf({ job, used }: PastRun): { layoutAreaMm2: string; usedAreaMm2
 /** What the pieces needed that came as far as this hardware, and what was taken for them. */
 function fitted(
   { job, steps }: PastRun,
-  { hardwareId, perPiece, fromStep }: PatternDefinition['hardware'][number],
+  line: PatternDefinition['hardware'][number],
   moved: readonly StockMovement[],
 ): { needed: number; taken: number }[] {
-  const taken = takenFor(moved, job.id, hardwareId);
+  const taken = takenFor(moved, job.id, line.hardwareId);
   if (taken === null || taken <= 0) return [];
-  const step = steps[fromStep ?? -1];
+  const step = steps[line.fromStep ?? -1];
   const pieces = Math.max(job.good + job.seconds, step === undefined ? 0 : handledIn(step));
-  return [{ needed: pieces * perPiece, taken }];
+  return [{ needed: upToWhole(unitsFor(line, pieces)).toNumber(), taken }];
 }
 
 function takenFor(moved: readonly StockMovement[], job: number, hardwareId: number): number | null {

@@ -24,9 +24,10 @@ export async function ticketHardware(
   const found = await em.find(Hardware, { id: { $in: ids } }, { orderBy: { name: 'asc' } });
   const free = await freeByItem(em, { hardwareId: { $in: ids } });
   const lines = found.filter(({ id }) => needed.has(id));
-  const rows = found.map(({ id, name }) => ({
+  const rows = found.map(({ id, name, unit }) => ({
     hardwareId: id,
     name,
+    unit,
     needed: needed.get(id) ?? 0,
     held: stock.held({ hardwareId: id }),
     free: free.get(`hardware ${id}`) ?? 0,

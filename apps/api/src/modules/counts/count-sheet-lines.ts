@@ -1,5 +1,5 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
-import { binTag } from '@hidewright/domain';
+import { binTag, type HardwareUnit } from '@hidewright/domain';
 
 /** A line of a sheet with everything that is said about its item. */
 export interface SheetLine {
@@ -8,6 +8,7 @@ export interface SheetLine {
   hardwareId: number | null;
   tag: string;
   name: string;
+  unit: HardwareUnit | null;
   form: string | null;
   place: string;
   added: boolean;
@@ -29,6 +30,7 @@ interface Row {
   hardware_id: number | null;
   tag: string | null;
   name: string;
+  unit: HardwareUnit | null;
   form: string | null;
   place: string;
   added: number;
@@ -43,7 +45,7 @@ interface Row {
   posted: number | null;
 }
 
-const sql = `SELECT l.*, lot.tag, lot.form, COALESCE(lot.place, h.bin, '') AS place, COALESCE(leather.name, h.name) AS name,
+const sql = `SELECT l.*, lot.tag, lot.form, COALESCE(lot.place, h.bin, '') AS place, COALESCE(leather.name, h.name) AS name, h.unit,
     COALESCE(b.on_hand, 0) AS on_hand, COALESCE(b.reserved, 0) AS reserved, m.value AS posted
   FROM count_line l
   LEFT JOIN lot ON lot.id = l.lot_id
@@ -62,6 +64,7 @@ export async function readSheetLines(em: EntityManager, countId: number): Promis
     hardwareId: row.hardware_id,
     tag: row.tag ?? binTag(row.hardware_id ?? 0),
     name: row.name,
+    unit: row.unit,
     form: row.form,
     place: row.place,
     added: row.added === 1,

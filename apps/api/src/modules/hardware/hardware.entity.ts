@@ -1,5 +1,5 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
-import type { HardwareUnit } from '@hidewright/contract';
+import type { HardwareUnit } from '@hidewright/domain';
 import type { Decimal } from 'decimal.js';
 import { LengthType, UnitPriceType } from '../../db/columns/columns.ts';
 

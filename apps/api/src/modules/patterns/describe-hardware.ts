@@ -16,13 +16,14 @@ export async function describeHardware(
   const partIds = [...kits.values()].flat().map(({ hardwareId }) => hardwareId);
   const found = await em.find(Hardware, { id: { $in: [...ids, ...partIds] } });
   const byId = new Map(found.map((each) => [each.id, each]));
-  return lines.map(({ hardwareId, perPiece, layers }) => {
+  return lines.map(({ hardwareId, perPiece, per = 'piece', layers }) => {
     const kind = byId.get(hardwareId);
     const parts = (kits.get(hardwareId) ?? []).flatMap((part) => byId.get(part.hardwareId) ?? []);
     const stack = { layers: layers ?? null, ...weightOf(leather) };
     const remarks =
       kind === undefined ? [] : kitSettingFaults(settingOf(kind), parts.map(settingOf), stack);
-    return { hardwareId, perPiece, name: kind?.name ?? '', remarks };
+    const { name = '', unit = 'piece' } = kind ?? {};
+    return { hardwareId, perPiece, per, name, unit, remarks };
   });
 }
 

@@ -43,7 +43,7 @@ describe('a pattern', () => {
       description: 'round, 95 mm',
     });
     expect(pattern.hardware).toEqual([
-      { hardwareId, perPiece: 2, name: 'Rivet 9 mm', remarks: [] },
+      { hardwareId, perPiece: 2, per: 'piece', name: 'Rivet 9 mm', unit: 'piece', remarks: [] },
     ]);
     expect(pattern.layout.pieces).toBeGreaterThan(0);
     expect(pattern.outlinePath).toMatch(/^M /);

@@ -1,3 +1,4 @@
+import { countedWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { sayArea } from '../stock/say-area.ts';
@@ -45,8 +46,16 @@ function asking({ number, lines }: PurchaseOrder): string {
 function sayLine(line: PurchaseLine, { areaUnit, currency }: Sender): string {
   const price = `${currency} ${line.unitPrice ?? ''}`;
   if (line.service !== null) return sayWork(line, line.service, { areaUnit, currency });
-  if (line.areaMm2 === null) return `- ${line.quantity ?? 0} × ${line.name}, at ${price} each`;
+  if (line.areaMm2 === null) return sayCounted(line, price);
   return `- ${sayArea(new Decimal(line.areaMm2), areaUnit)} of ${line.name}, at ${price} per ft²`;
+}
+
+/** - 500 × Rivets 7 mm, at USD 0.11 each; - 250 ml of Edge dye, at USD 0.04 per ml */
+function sayCounted({ name, quantity, unit }: PurchaseLine, price: string): string {
+  const count = quantity ?? 0;
+  return unit === null || unit === 'piece'
+    ? `- ${count} × ${name}, at ${price} each`
+    : `- ${countedWords(count, unit)} of ${name}, at ${price} per ${unitWord(unit)}`;
 }
 
 /** - Dyeing of T-0012, Oak tan natural 7–8 oz, 24.8 ft², to become Oak tan black 7–8 oz, at USD 1.50 per ft² */

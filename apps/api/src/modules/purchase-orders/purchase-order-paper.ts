@@ -1,4 +1,4 @@
-import { addDays, minorDigits } from '@hidewright/domain';
+import { addDays, countedWords, minorDigits, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine } from '@hidewright/contract';
 import { dayIn } from '../../day-in.ts';
@@ -33,21 +33,24 @@ export async function paperOf(work: Work, order: PurchaseOrder): Promise<Purchas
 
 function printedLine(
   line: PurchaseLine,
-  unit: Workshop['areaUnit'],
+  areaUnit: Workshop['areaUnit'],
 ): PurchaseOrderPaper['lines'][number] {
-  const { name, areaMm2, quantity, unitPrice = '0.00', amount = '0.00' } = line;
+  const { name, areaMm2, quantity, unit, unitPrice = '0.00', amount = '0.00' } = line;
   return {
     name,
     quantity:
       areaMm2 === null
-        ? new Intl.NumberFormat('en').format(quantity ?? 0)
-        : sayArea(new Decimal(areaMm2), unit),
+        ? countedWords(quantity ?? 0, unit ?? 'piece')
+        : sayArea(new Decimal(areaMm2), areaUnit),
     unitPrice,
-    per: areaMm2 === null ? 'each' : 'per ft²',
+    per: areaMm2 === null ? perWord(unit) : 'per ft²',
     amount,
     ...(line.service !== null && workOf(line, line.service)),
   };
 }
+
+const perWord = (unit: PurchaseLine['unit']): string =>
+  unit === null || unit === 'piece' ? 'each' : `per ${unitWord(unit)}`;
 
 /** Work on a lot of the shop's own: what it becomes stands under its name. */
 function workOf(

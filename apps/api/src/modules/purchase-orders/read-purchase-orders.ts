@@ -86,6 +86,7 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
     position: line.position,
     ...whatOf(line),
     name: nameOf(line, names),
+    unit: names.hardware.get(line.hardwareId ?? 0)?.unit ?? null,
     service: serviceOf(line, order, names),
     areaMm2: area(line.quantity),
     receivedAreaMm2: area(line.received),

@@ -1,3 +1,4 @@
+import { countedWords } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
@@ -13,7 +14,7 @@ interface DescribedItem {
   name: string;
   /** What one unit of the ledger cost when it was bought, in whole currency units. */
   unitCost: Decimal;
-  /** A quantity of the ledger in words: "12.4 ft²", "600". */
+  /** A quantity of the ledger in words: "12.4 ft²", "600", "250 ml". */
   say(quantity: number): string;
 }
 
@@ -38,5 +39,6 @@ async function describeLot(em: EntityManager, id: number): Promise<DescribedItem
 async function describeHardware(em: EntityManager, id: number): Promise<DescribedItem> {
   const hardware = await em.findOne(Hardware, id);
   if (hardware === null) throw notFound('hardware');
-  return { name: hardware.name, unitCost: hardware.unitPrice, say: (quantity) => String(quantity) };
+  const { name, unitPrice, unit } = hardware;
+  return { name, unitCost: unitPrice, say: (quantity) => countedWords(quantity, unit) };
 }

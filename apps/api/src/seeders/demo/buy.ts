@@ -117,7 +117,8 @@ async function receive(
   purchaseOrderId: number,
 ) {
   const open = await work.em.find(PurchaseLine, { purchaseOrderId });
-  const lots = (purchase.leather ?? []).flatMap(({ name, form, areasFt2, markedFt2, shade }) => {
+  const lots = (purchase.leather ?? []).flatMap((hides) => {
+    const { name, form, areasFt2, markedFt2, weightsOz, shade } = hides;
     const leatherId = furnished.leathers.id(name);
     const purchaseLineId = open.find((line) => line.leatherId === leatherId)?.id ?? null;
     return areasFt2.map((ft2, at) => ({
@@ -126,6 +127,7 @@ async function receive(
       purchaseLineId,
       form,
       measuredAreaMm2: areaOf(ft2),
+      weightOz: weightsOz?.[at] ?? null,
       markedAreaMm2: markedFt2?.[at] === undefined ? null : areaOf(markedFt2[at]),
       shade,
     }));

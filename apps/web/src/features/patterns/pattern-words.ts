@@ -1,4 +1,5 @@
-import type { PatternDefinition } from '@hidewright/contract';
+import type { Pattern, PatternDefinition } from '@hidewright/contract';
+import { countedWords } from '@hidewright/domain';
 import { countText, percentText, unitPriceText } from '../../lib/formatting.ts';
 
 type Hardware = PatternDefinition['hardware'][number];
@@ -12,16 +13,29 @@ export const learningModels: Record<Learning['model'], string> = {
   cumulative: 'running average (Wright)',
 };
 
+const pers: Record<Supply['per'], string> = {
+  piece: 'for each piece',
+  hundred: 'for 100 pieces',
+  run: 'for the run',
+};
+export const perChoices = Object.entries(pers).map(([value, label]) => ({ value, label }));
+
+/** "for each piece": what a line of hardware is counted for. */
+export const perWord = (per: Supply['per'] = 'piece'): string => pers[per];
+
 const nameOf = (names: Names, id: number): string => names.get(id) ?? 'hardware no longer kept';
 
-/** 2 × Rivet, from step 4 Fold and rivet on, 2 % spoiled */
+/** 2 × Rivet, from step 4 Fold and rivet on, 2 % spoiled; 45 ml of Edge dye, for 100 pieces */
 export function hardwareWords(
   line: Hardware,
-  names: Names,
+  { name, unit }: Pick<Pattern['hardware'][number], 'name' | 'unit'>,
   work: PatternDefinition['work'],
 ): string {
   const notes = [
-    `${countText(line.perPiece)} × ${nameOf(names, line.hardwareId)}`,
+    unit === 'piece'
+      ? `${countText(line.perPiece)} × ${name}`
+      : `${countedWords(line.perPiece, unit)} of ${name}`,
+    ...(line.per === undefined || line.per === 'piece' ? [] : [pers[line.per]]),
     ...(typeof line.fromStep === 'number' ? [fromStepWords(line.fromStep, work)] : []),
     ...(line.lossPercent === undefined ? [] : [`${percentText(line.lossPercent)} spoiled`]),
   ];
@@ -32,12 +46,6 @@ function fromStepWords(step: number, work: PatternDefinition['work']): string {
   const name = work.kind === 'steps' ? work.steps[step]?.name : undefined;
   return name === undefined ? 'for every piece cut' : `from step ${step + 1} ${name} on`;
 }
-
-const pers: Record<Supply['per'], string> = {
-  piece: 'for each piece',
-  hundred: 'for 100 pieces',
-  run: 'for the run',
-};
 
 /** Edge dye, 1.80 for 100 pieces; without its cost for whoever may not see it. */
 export function supplyWords({ name, cost, per }: Supply): string {

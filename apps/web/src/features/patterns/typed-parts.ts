@@ -9,6 +9,7 @@ export function hardwareBody(line: Typed, steps: number): Typed {
   return {
     ...pick(line, ['hardwareId', 'perPiece']),
     ...filled({
+      per: line['per'] === 'piece' ? undefined : line['per'],
       fromStep: gone ? undefined : fromStep,
       lossPercent: line['lossPercent'],
       layers: line['layers'],
@@ -36,6 +37,8 @@ function swapBody({ hardwareId, byHardwareId, perPiece }: Typed): Typed {
   const comes = byHardwareId === '' ? null : (byHardwareId ?? null);
   return { hardwareId: out, byHardwareId: comes, perPiece: comes === null ? 1 : perPiece };
 }
+
+export const blankHardware = { perPiece: 1, per: 'piece' };
 
 export const blankSwap = { hardwareId: null, byHardwareId: null, perPiece: 1 };
 

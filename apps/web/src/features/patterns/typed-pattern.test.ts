@@ -39,6 +39,7 @@ const full: PatternDefinition = {
   hardware: [
     { hardwareId: 2, perPiece: 1, fromStep: 1, lossPercent: '3' },
     { hardwareId: 3, perPiece: 2 },
+    { hardwareId: 6, perPiece: 45, per: 'hundred' },
   ],
   supplies: [{ name: 'Edge dye', cost: '1.8', per: 'hundred' }],
   options: [
@@ -167,6 +168,7 @@ describe('a pattern in its form', () => {
     expect(definition['hardware']).toEqual([
       { hardwareId: 2, perPiece: 1, lossPercent: '3' },
       { hardwareId: 3, perPiece: 2 },
+      { hardwareId: 6, perPiece: 45, per: 'hundred' },
     ]);
     expect(definition['options']).toMatchObject([{ swaps: [{ byHardwareId: null, perPiece: 1 }] }]);
   });

@@ -74,6 +74,7 @@ export function typedPattern({ name, definition }: Pick<Pattern, 'name' | 'defin
       outline: { ...blank.outline, ...definition.outline },
       handCount: { ...blank.handCount, ...definition.handCount },
       container: { ...blank.container, ...definition.container },
+      hardware: definition.hardware.map((line) => ({ ...line, per: line.per ?? 'piece' })),
       supplies: definition.supplies ?? [],
       options: definition.options ?? [],
       work: typedWork(definition.work),

@@ -1,6 +1,6 @@
 import type { addPurchaseOrder } from '@hidewright/contract';
 import type { Lot, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
-import { mm2ToFootage, round } from '@hidewright/domain';
+import { mm2ToFootage, round, type HardwareUnit } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { z } from 'zod';
 import { isFigure } from '../../lib/units.ts';
@@ -16,6 +16,8 @@ export interface Goods {
   price: string | undefined;
   /** Of hardware: how many come in a pack. */
   packSize?: number;
+  /** Of hardware: what one of it is. */
+  unit?: HardwareUnit;
 }
 
 /** A lot of which something can go out to be worked on. */

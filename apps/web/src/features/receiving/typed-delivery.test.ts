@@ -4,6 +4,7 @@ import { blankLot, deliveryOf, isOpen, nextLot, withoutWhatCame } from './typed-
 
 const nothing = { areaMm2: null, quantity: null };
 const none = {
+  unit: null,
   service: null,
   areaMm2: null,
   receivedAreaMm2: null,

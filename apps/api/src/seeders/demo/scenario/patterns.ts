@@ -9,7 +9,7 @@ interface NamedOption {
 
 type Named = Omit<PatternDefinition, 'leatherId' | 'hardware' | 'options' | 'history'> & {
   leather: LeatherName;
-  hardware: { name: HardwareName; perPiece: number }[];
+  hardware: { name: HardwareName; perPiece: number; per?: 'hundred' }[];
   options?: NamedOption[];
 };
 
@@ -45,11 +45,11 @@ export const patterns = [
       container: { form: 'panel', widthMm: '304.8', heightMm: '406.4' },
       ...spaced,
       leather: 'Oak tan natural 7–8 oz',
-      hardware: [{ name: 'Card sleeves, kraft', perPiece: 1 }],
-      supplies: [
-        { name: 'Edge dye', cost: '2.4', per: 'hundred' },
-        { name: 'Beeswax', cost: '0.9', per: 'hundred' },
+      hardware: [
+        { name: 'Card sleeves, kraft', perPiece: 1 },
+        { name: 'Edge dye, dark brown', perPiece: 60, per: 'hundred' },
       ],
+      supplies: [{ name: 'Beeswax', cost: '0.9', per: 'hundred' }],
       work: {
         kind: 'steps',
         steps: [
@@ -85,8 +85,8 @@ export const patterns = [
       hardware: [
         { name: 'Buckles 20 mm, solid brass', perPiece: 1 },
         { name: 'Rivets 7 mm, antique brass', perPiece: 2 },
+        { name: 'Edge dye, dark brown', perPiece: 45, per: 'hundred' },
       ],
-      supplies: [{ name: 'Edge dye', cost: '1.8', per: 'hundred' }],
       options: [
         {
           name: 'With a brass ring',

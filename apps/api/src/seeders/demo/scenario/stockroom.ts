@@ -101,6 +101,7 @@ export const hardware = [
     unitPrice: '0.11',
     packSize: 100,
     reorderAt: 300,
+    bin: 'drawer 1',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -109,6 +110,7 @@ export const hardware = [
     unitPrice: '0.38',
     packSize: 50,
     reorderAt: 100,
+    bin: 'drawer 3',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -117,6 +119,7 @@ export const hardware = [
     unitPrice: '0.62',
     packSize: 25,
     reorderAt: 100,
+    bin: 'drawer 3',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -125,6 +128,7 @@ export const hardware = [
     unitPrice: '0.24',
     packSize: 100,
     reorderAt: 300,
+    bin: 'drawer 1',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -133,6 +137,7 @@ export const hardware = [
     unitPrice: '0.07',
     packSize: 200,
     reorderAt: 200,
+    bin: 'drawer 4',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -141,6 +146,17 @@ export const hardware = [
     unitPrice: '0.09',
     packSize: 250,
     reorderAt: 250,
+    bin: 'packing shelf',
+    supplier: 'Fennbridge Fittings',
+  },
+  {
+    name: 'Edge dye, dark brown',
+    kind: 'supplies',
+    unit: 'ml',
+    unitPrice: '0.04',
+    packSize: 250,
+    reorderAt: 250,
+    bin: 'dye cupboard',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -149,6 +165,7 @@ export const hardware = [
     unitPrice: '0.05',
     packSize: 100,
     reorderAt: 0,
+    bin: 'drawer 2',
     supplier: 'Fennbridge Fittings',
   },
   {
@@ -157,6 +174,7 @@ export const hardware = [
     unitPrice: '0.045',
     packSize: 100,
     reorderAt: 0,
+    bin: 'drawer 2',
     supplier: 'Fennbridge Fittings',
   },
 ] as const satisfies { supplier: SupplierName; [field: string]: string | number }[];
@@ -172,6 +190,8 @@ interface Purchase {
     areasFt2: string[];
     /** As the tannery stamped them on, in the same order. */
     markedFt2?: string[];
+    /** As the gauge has them here, in the same order. */
+    weightsOz?: string[];
     shade: string;
   }[];
   hardware?: { name: HardwareName; quantity: number; batch?: string; came?: number }[];
@@ -211,6 +231,7 @@ export const purchases: Purchase[] = [
       { name: 'Snaps, line 20, brass', quantity: 1200 },
       { name: 'Split rings 12 mm, nickel', quantity: 800 },
       { name: 'Card sleeves, kraft', quantity: 1500 },
+      { name: 'Edge dye, dark brown', quantity: 1000 },
     ],
   },
   {
@@ -233,6 +254,7 @@ export const purchases: Purchase[] = [
       { name: 'Rivets 7 mm, antique brass', quantity: 1000 },
       { name: 'Snaps, line 20, brass', quantity: 1000 },
       { name: 'Card sleeves, kraft', quantity: 1000 },
+      { name: 'Edge dye, dark brown', quantity: 500 },
     ],
   },
   {
@@ -271,6 +293,7 @@ export const purchases: Purchase[] = [
       { name: 'Buckles 20 mm, solid brass', quantity: 200 },
       { name: 'Snaps, line 20, brass', quantity: 600 },
       { name: 'Card sleeves, kraft', quantity: 750 },
+      { name: 'Edge dye, dark brown', quantity: 250 },
       { name: 'Rivet caps 7 mm, nickel', quantity: 200 },
       { name: 'Rivet posts 8 mm, nickel', quantity: 200 },
     ],
@@ -285,6 +308,7 @@ export const purchases: Purchase[] = [
         form: 'side',
         areasFt2: ['24.4'],
         markedFt2: ['24.5'],
+        weightsOz: ['5.6'],
         shade: 'red-brown',
       },
       {
@@ -292,6 +316,7 @@ export const purchases: Purchase[] = [
         form: 'side',
         areasFt2: ['22.6', '23.2'],
         markedFt2: ['23.5', '23.25'],
+        weightsOz: ['7.4', '7.8'],
         shade: 'pale',
       },
     ],

@@ -21,7 +21,10 @@ export function leatherGoods(leathers: readonly Leather[]): Goods[] {
 export function hardwareGoods(hardware: readonly Hardware[]): Goods[] {
   return inUse(hardware)
     .filter(({ parts, fromCustomer }) => parts.length === 0 && !fromCustomer)
-    .map(({ id, name, unitPrice, packSize }) => ({ id, name, price: unitPrice, packSize }));
+    .map(({ id, name, unitPrice, packSize, unit }) => ({
+      ...{ id, name, packSize, unit },
+      price: unitPrice,
+    }));
 }
 
 function inUse<Thing extends Named>(things: readonly Thing[]): Thing[] {

@@ -64,7 +64,9 @@ export function Component() {
                 <RelatedHardware hardware={hardware} />
               </Card>
             )}
-            {!isKit && <HeldAndAdjust item={item} handlesStock={handlesStock} />}
+            {!isKit && (
+              <HeldAndAdjust item={item} unit={hardware.unit} handlesStock={handlesStock} />
+            )}
           </>
         }
       >

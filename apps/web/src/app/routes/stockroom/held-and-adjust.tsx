@@ -1,3 +1,4 @@
+import type { HardwareUnit } from '@hidewright/domain';
 import { Card } from '../../../components/card.tsx';
 import { AdjustForm } from '../../../features/stock/components/adjust-form.tsx';
 import { StandingCard } from '../../../features/stock/components/standing-card.tsx';
@@ -5,12 +6,14 @@ import { HeldList } from '../../../features/stock/components/held-list.tsx';
 
 interface HeldAndAdjustProps {
   item: { lotId: number } | { hardwareId: number };
+  /** What one of the hardware is. */
+  unit?: HardwareUnit;
   /** Whether the person works with the stock, and may enter the bench. */
   handlesStock: boolean;
 }
 
 /** Beside a lot or a hardware: which jobs it is held for, and setting it to what is really there. */
-export function HeldAndAdjust({ item, handlesStock }: HeldAndAdjustProps) {
+export function HeldAndAdjust({ item, unit, handlesStock }: HeldAndAdjustProps) {
   return (
     <>
       {'hardwareId' in item && <StandingCard hardwareId={item.hardwareId} />}
@@ -21,6 +24,7 @@ export function HeldAndAdjust({ item, handlesStock }: HeldAndAdjustProps) {
         <Card title="Adjust" subtitle="to what is really there">
           <AdjustForm
             key={JSON.stringify(item)}
+            unit={unit}
             item={'lotId' in item ? { of: 'lot', ...item } : { of: 'hardware', ...item }}
           />
         </Card>

@@ -1,3 +1,4 @@
+import { unitWord } from '@hidewright/domain';
 import type { CountLine } from '@hidewright/contract';
 import { CircleCheck, Clock } from 'lucide-react';
 import { useId, useState } from 'react';
@@ -51,7 +52,7 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
       <div className="mt-2 flex flex-wrap items-center gap-2">
         <InputFrame
           id={entryId(line.id)}
-          unit={ofLot ? areaUnits[areaUnit].sign : 'pieces'}
+          unit={line.unit === null ? areaUnits[areaUnit].sign : unitWord(line.unit, 2)}
           short
           invalid={wrong !== undefined}
         >

@@ -1,9 +1,9 @@
+import { countedWords, unitWord } from '@hidewright/domain';
 import type { Hardware } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { lengthText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { lengthFigure } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { countedText, unitWord } from '../unit-words.ts';
 
 /** The counts, large; then what it costs and who sells it; then what it is and how it is set. */
 export function HardwareFacts({ hardware }: { hardware: Hardware }) {
@@ -19,7 +19,7 @@ export function HardwareFacts({ hardware }: { hardware: Hardware }) {
     <div className="space-y-5">
       <KeyFigures
         large
-        figures={counts.map(({ word, count }) => ({ word, figure: countedText(count, unit) }))}
+        figures={counts.map(({ word, count }) => ({ word, figure: countedWords(count, unit) }))}
       />
       <Buying hardware={hardware} isKit={isKit} />
       <Details hardware={hardware} />
@@ -31,8 +31,8 @@ function Buying({ hardware, isKit }: { hardware: Hardware; isKit: boolean }) {
   const { currency } = useWorkshop();
   const { unit, unitPrice, valueOnHand, priceFromParts, fromCustomer } = hardware;
   const bought = [
-    { word: 'Keep at least', figure: countedText(hardware.reorderAt, unit) },
-    { word: 'In packs of', figure: countedText(hardware.packSize, unit) },
+    { word: 'Keep at least', figure: countedWords(hardware.reorderAt, unit) },
+    { word: 'In packs of', figure: countedWords(hardware.packSize, unit) },
     {
       word: 'Supplier',
       figure: fromCustomer ? 'the customer brings it' : (hardware.supplierName ?? '–'),

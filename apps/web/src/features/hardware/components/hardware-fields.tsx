@@ -1,4 +1,4 @@
-import type { HardwareUnit } from '@hidewright/contract';
+import { unitWord, type HardwareUnit } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { useEffect } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
@@ -8,7 +8,6 @@ import { RadioCards } from '../../../components/radio-cards.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { hardwareListQuery } from '../hardware.queries.ts';
-import { unitWord } from '../unit-words.ts';
 import { KitFields } from './kit-fields.tsx';
 import { SettingFields } from './setting-fields.tsx';
 import { StandInFields } from './stand-in-fields.tsx';

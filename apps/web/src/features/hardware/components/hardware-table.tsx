@@ -1,4 +1,5 @@
 import type { Hardware } from '@hidewright/contract';
+import { unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { useMemo, type ReactNode } from 'react';
 import type { Column } from '../../../components/column.ts';
@@ -49,6 +50,9 @@ const basics: Column<Hardware>[] = [
     cell: (row) => (
       <span className="inline-flex flex-wrap items-baseline gap-x-3">
         <TextLink to={`/stockroom/hardware/${row.id}`}>{row.name}</TextLink>
+        {row.unit !== 'piece' && (
+          <span className="text-sm text-ink-soft">in {unitWord(row.unit, 2)}</span>
+        )}
         {row.short && <StateMark state="short" />}
       </span>
     ),

@@ -1,10 +1,9 @@
-import { hardwareUnits, type HardwareUnit } from '@hidewright/contract';
+import { hardwareUnits, unitWord, type HardwareUnit } from '@hidewright/domain';
 import { useWatch } from 'react-hook-form';
 import { Checkbox } from '../../../components/checkbox.tsx';
 import { More } from '../../../components/more.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
-import { unitWord } from '../unit-words.ts';
 
 const names = ['unit', 'metal', 'colour', 'bin', 'fromCustomer'];
 const units = hardwareUnits.map((unit) => ({ value: unit, label: unitWord(unit) }));

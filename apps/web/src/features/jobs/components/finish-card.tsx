@@ -1,3 +1,4 @@
+import { unitWord } from '@hidewright/domain';
 import { finishJob, type Job } from '@hidewright/contract';
 import { AreaField } from '../../../components/area-field.tsx';
 import { Card } from '../../../components/card.tsx';
@@ -60,11 +61,12 @@ export function FinishCard({ job }: { job: Job }) {
             help="Goes back to the lot that it was taken from. What is cut off gets a tag of its own above, as an offcut."
           />
         ))}
-        {hardware.map(({ hardwareId, name }, at) => (
+        {hardware.map(({ hardwareId, name, unit }, at) => (
           <NumberField
             key={hardwareId}
             name={`hardwareLeft.${at}.quantity`}
             label={`Left: ${name}`}
+            unit={unit === 'piece' ? undefined : unitWord(unit, 2)}
           />
         ))}
       </Form>

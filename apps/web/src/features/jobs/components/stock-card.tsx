@@ -1,3 +1,4 @@
+import { countedWords } from '@hidewright/domain';
 import type { Job, JobHardware, JobLot } from '@hidewright/contract';
 import { useQueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
@@ -208,9 +209,10 @@ function lotLine(lot: JobLot, say: (areaMm2: string) => string): string {
 }
 
 function hardwareLine(item: JobHardware): string {
-  const { needed, held, taken, free } = item;
-  const parts = [standsInText(item) || `${countText(needed)} needed`];
-  if (held > 0) parts.push(`${countText(held)} held`);
-  if (taken > 0) parts.push(`${countText(taken)} taken`);
-  return [...parts, `${countText(free)} free`].join(' · ');
+  const { needed, held, taken, free, unit } = item;
+  const counted = (count: number) => countedWords(count, unit);
+  const parts = [standsInText(item) || `${counted(needed)} needed`];
+  if (held > 0) parts.push(`${counted(held)} held`);
+  if (taken > 0) parts.push(`${counted(taken)} taken`);
+  return [...parts, `${counted(free)} free`].join(' · ');
 }

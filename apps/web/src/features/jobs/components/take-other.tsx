@@ -1,3 +1,4 @@
+import { countedWords } from '@hidewright/domain';
 import { takeForJob, type Job } from '@hidewright/contract';
 import { useState } from 'react';
 import { useWatch } from 'react-hook-form';
@@ -9,7 +10,7 @@ import { Form } from '../../../components/form.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { say } from '../../../components/toast.ts';
-import { countText, rackAreaText } from '../../../lib/formatting.ts';
+import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useHoldForJob, useTakeForJob } from '../jobs.mutations.ts';
 import { standsInText } from '../stand-in-words.ts';
@@ -120,7 +121,7 @@ function MoveHardware(props: MoveProps) {
   const { job, deed } = props;
   const choices = [...job.hardware, ...job.standIns].map((item) => ({
     value: item.hardwareId,
-    label: [`${item.name}: ${countText(item.free)} free`, standsInText(item)]
+    label: [`${item.name}: ${countedWords(item.free, item.unit)} free`, standsInText(item)]
       .filter(Boolean)
       .join(', '),
   }));

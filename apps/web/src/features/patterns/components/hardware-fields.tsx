@@ -1,3 +1,4 @@
+import { unitWord, type HardwareUnit } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { Plus } from 'lucide-react';
 import { useState } from 'react';
@@ -6,28 +7,39 @@ import { Button } from '../../../components/button.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { unitPriceText } from '../../../lib/formatting.ts';
+import { perChoices } from '../pattern-words.ts';
 import { hardwareChoicesQuery } from '../patterns.queries.ts';
+import { blankHardware } from '../typed-parts.ts';
 import { AddHardwareDialog } from './add-hardware-dialog.tsx';
+import { FieldRow } from './field-row.tsx';
 import { LineRemarks } from './line-remarks.tsx';
 import { MoreOfHardware } from './more-of-hardware.tsx';
 import { RemoveButton } from '../../../components/remove-button.tsx';
 
 const name = 'definition.hardware';
 
+/** ", 0.04 per ml"; nothing for whoever may not see it. */
+function priceOf(unitPrice: string | undefined, unit: HardwareUnit): string {
+  if (unitPrice === undefined) return '';
+  const per = unit === 'piece' ? '' : ` per ${unitWord(unit)}`;
+  return `, ${unitPriceText(unitPrice)}${per}`;
+}
+
 /** What goes on each piece: rivets, snaps, a box. */
 export function HardwareFields() {
   const { fields, append, remove } = useFieldArray({ name });
   const { data: hardware = [] } = useQuery(hardwareChoicesQuery());
   const [adding, setAdding] = useState(false);
-  const choices = hardware.map(({ id, name: label, unitPrice }) => ({
+  const choices = hardware.map(({ id, name: label, unitPrice, unit }) => ({
     value: id,
-    label: unitPrice === undefined ? label : `${label}, ${unitPriceText(unitPrice)}`,
+    label: `${label}${priceOf(unitPrice, unit)}`,
   }));
   return (
     <fieldset>
       <legend className="mb-1 text-lg font-semibold">Hardware and supplies</legend>
       <p className="mb-3 text-sm text-ink-soft">
-        What goes on each piece; leave it empty where there is none.
+        What goes on each piece, and what is used up with it and kept in stock, such as thread;
+        leave it empty where there is none.
       </p>
       <div className="space-y-3">
         {fields.map((field, at) => (
@@ -42,9 +54,17 @@ export function HardwareFields() {
                 choices={choices}
               />
             </div>
-            <NumberField name={`${name}.${at}.perPiece`} label="For each piece" whenEmpty="text" />
             <RemoveButton label={`Remove hardware ${at + 1}`} onRemove={() => remove(at)} />
-            <div className="basis-full">
+            <div className="basis-full space-y-2">
+              <FieldRow>
+                <NumberField name={`${name}.${at}.perPiece`} label="How many" whenEmpty="text" />
+                <SelectField
+                  name={`${name}.${at}.per`}
+                  label="Counted"
+                  choices={perChoices}
+                  short
+                />
+              </FieldRow>
               <MoreOfHardware at={at} />
               <LineRemarks at={at} />
             </div>
@@ -57,7 +77,7 @@ export function HardwareFields() {
             tone="quiet"
             onClick={() =>
               append(
-                { hardwareId: '', perPiece: 1 },
+                { ...blankHardware, hardwareId: '' },
                 { focusName: `${name}.${fields.length}.hardwareId` },
               )
             }
@@ -72,7 +92,7 @@ export function HardwareFields() {
       <AddHardwareDialog
         open={adding}
         onOpenChange={setAdding}
-        onAdded={({ id }) => append({ hardwareId: id, perPiece: 1 }, { shouldFocus: false })}
+        onAdded={({ id }) => append({ ...blankHardware, hardwareId: id }, { shouldFocus: false })}
       />
     </fieldset>
   );

@@ -6,6 +6,12 @@ import { areaText, minutesText, numberText, percentText } from '../../../lib/for
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { minutesBehind, rejectsBehind, runsWord } from '../learned-words.ts';
 
+const goodPerWords = {
+  piece: 'for each good piece',
+  hundred: 'for 100 good pieces',
+  run: 'for each run',
+};
+
 /** The runs that count, taken together by their pieces. */
 export function LearnedTogether({ learned }: { learned: Learned }) {
   const { areaUnit, currency } = useWorkshop();
@@ -41,11 +47,11 @@ export function LearnedTogether({ learned }: { learned: Learned }) {
       />
       {hardware.length > 0 && (
         <>
-          <h3 className="mt-4">Hardware for each good piece</h3>
+          <h3 className="mt-4">Hardware that was taken</h3>
           <ul>
-            {hardware.map(({ name, said, found }) => (
+            {hardware.map(({ name, per, said, found }) => (
               <li key={name}>
-                {`${name}: ${found === null ? 'not logged' : numberText(found, 2)}`}
+                {`${name}: ${found === null ? 'not logged' : `${numberText(found, 2)} ${goodPerWords[per]}`}`}
                 <span className="text-ink-soft">{`, the pattern says ${said}`}</span>
               </li>
             ))}

@@ -6,25 +6,22 @@ import { More } from '../../../components/more.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { countText } from '../../../lib/formatting.ts';
+import { perChoices } from '../pattern-words.ts';
 import { FieldRow } from './field-row.tsx';
 import { RemoveButton } from '../../../components/remove-button.tsx';
 
 const name = 'definition.supplies';
 const most = 20;
-const pers = [
-  { value: 'piece', label: 'for each piece' },
-  { value: 'hundred', label: 'for 100 pieces' },
-  { value: 'run', label: 'for the run' },
-];
 
-/** Dye, thread, glue: what is used up by the way and not counted on a shelf. */
+/** Dye, thread, glue of which no stock is kept: their cost alone goes into the price. */
 export function SupplyFields() {
   const { fields, append, remove } = useFieldArray({ name });
   const note = fields.length > 0 ? countText(fields.length) : undefined;
   return (
     <More word="Dye, thread, glue" note={note} names={[name]}>
       <p className="text-sm text-ink-soft">
-        What is used up by the way: its cost goes into the price, and no stock is kept of it.
+        What is used up by the way and not counted: its cost goes into the price. Supplies that you
+        keep stock of stand above, with the hardware.
       </p>
       {fields.map((field, at) => (
         <div key={field.id} className="flex flex-wrap items-start gap-x-4 gap-y-2">
@@ -35,7 +32,7 @@ export function SupplyFields() {
           <div className="basis-full">
             <FieldRow>
               <MoneyField name={`${name}.${at}.cost`} label="Cost" />
-              <SelectField name={`${name}.${at}.per`} label="Counted" choices={pers} short />
+              <SelectField name={`${name}.${at}.per`} label="Counted" choices={perChoices} short />
             </FieldRow>
           </div>
         </div>

@@ -1,9 +1,11 @@
+import type { HardwarePer } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { Plus } from 'lucide-react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
+import { perWord } from '../pattern-words.ts';
 import { hardwareChoicesQuery, hardwareNamesQuery } from '../patterns.queries.ts';
 import { blankSwap } from '../typed-parts.ts';
 import { RemoveButton } from '../../../components/remove-button.tsx';
@@ -12,6 +14,7 @@ const most = 10;
 
 interface Line {
   hardwareId?: unknown;
+  per?: HardwarePer;
 }
 
 /** What is different in an option: this in place of that, something more, or something less. */
@@ -29,6 +32,7 @@ export function SwapFields({ option }: { option: number }) {
           key={field.id}
           swap={`${name}.${at}`}
           taken={taken}
+          lines={lines}
           kept={kept.map(({ id }) => id)}
           names={names}
           onRemove={fields.length > 1 ? () => remove(at) : undefined}
@@ -52,6 +56,7 @@ export function SwapFields({ option }: { option: number }) {
 
 interface SwapRowProps {
   swap: string;
+  lines: readonly Line[];
   /** The hardware that the pattern takes so far. */
   taken: readonly number[];
   /** What the shop has to offer. */
@@ -61,12 +66,14 @@ interface SwapRowProps {
   word: string;
 }
 
-function SwapRow({ swap, taken, kept, names, onRemove, word }: SwapRowProps) {
+function SwapRow({ swap, lines, taken, kept, names, onRemove, word }: SwapRowProps) {
   const typed = useWatch({ name: swap }) as
     { hardwareId?: unknown; byHardwareId?: unknown } | undefined;
   // What is chosen stays in sight although it is there no more: the mistake can be seen then.
   const out = choicesOf(names, [...taken, Number(typed?.hardwareId ?? 0)]);
   const comes = choicesOf(names, [...kept, Number(typed?.byHardwareId ?? 0)]);
+  // What comes in its place is counted as that was.
+  const replaced = lines.find(({ hardwareId }) => Number(hardwareId) === Number(typed?.hardwareId));
   return (
     <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
       <div className="min-w-48 grow basis-48">
@@ -90,7 +97,12 @@ function SwapRow({ swap, taken, kept, names, onRemove, word }: SwapRowProps) {
         />
       </div>
       {Number(typed?.byHardwareId ?? 0) > 0 && (
-        <NumberField name={`${swap}.perPiece`} label="For each piece" whenEmpty="text" />
+        <NumberField
+          name={`${swap}.perPiece`}
+          label="How many"
+          unit={perWord(replaced?.per)}
+          whenEmpty="text"
+        />
       )}
       {onRemove && <RemoveButton label={word} onRemove={onRemove} />}
     </div>

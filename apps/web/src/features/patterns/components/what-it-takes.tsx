@@ -31,7 +31,10 @@ export function WhatItTakes({ pattern }: { pattern: Pattern }) {
         )}
         <List
           word="hardware"
-          lines={definition.hardware.map((line) => hardwareWords(line, known, work))}
+          lines={definition.hardware.flatMap((line, at) => {
+            const kind = pattern.hardware[at];
+            return kind ? [hardwareWords(line, kind, work)] : [];
+          })}
         />
         <List word="used up" lines={definition.supplies?.map(supplyWords)} />
         <List

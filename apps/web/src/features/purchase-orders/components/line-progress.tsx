@@ -18,12 +18,12 @@ interface LineProgressProps {
 export function LineProgress(props: LineProgressProps) {
   const { line, order, today, onChangeDay, onCloseLine, onReopen } = props;
   const workshop = useWorkshop();
-  const { toCome, over, short, expectedOn } = line;
-  if (!isNothing(over)) return <strong>{`${goodsText(over, workshop)} over`}</strong>;
+  const { toCome, over, short, expectedOn, unit } = line;
+  if (!isNothing(over)) return <strong>{`${goodsText(over, workshop, unit)} over`}</strong>;
   if (!isNothing(short))
     return (
       <span className="block md:text-left">
-        <strong className="block text-brass">{`${goodsText(short, workshop)} short`}</strong>
+        <strong className="block text-brass">{`${goodsText(short, workshop, unit)} short`}</strong>
         {onReopen && (
           <LineButton onClick={onReopen} word="Await the rest" of={` of ${line.name}`} />
         )}
@@ -37,7 +37,7 @@ export function LineProgress(props: LineProgressProps) {
   const late = expectedOn !== null && expectedOn < today;
   return (
     <span className="block md:text-left">
-      {goodsText(toCome, workshop)}
+      {goodsText(toCome, workshop, unit)}
       {expectedOn !== null && (
         <span className={late ? 'block font-semibold text-oxblood' : 'block'}>
           {`${late ? 'late: ' : 'by '}${dayText(expectedOn, today)}`}

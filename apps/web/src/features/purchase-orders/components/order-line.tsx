@@ -1,5 +1,6 @@
 import { X } from 'lucide-react';
 import type { SupplierOfferReply } from '@hidewright/contract';
+import { unitWord } from '@hidewright/domain';
 import { useWatch } from 'react-hook-form';
 import { AreaField } from '../../../components/area-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
@@ -29,6 +30,7 @@ export function OrderLine({ at, of, goods, offers, onRemove }: OrderLineProps) {
     goods,
     offers,
   );
+  const unit = chosen?.unit ?? 'piece';
   const packs =
     terms !== undefined || chosen?.packSize === undefined || chosen.packSize === 1
       ? undefined
@@ -46,12 +48,17 @@ export function OrderLine({ at, of, goods, offers, onRemove }: OrderLineProps) {
       {of === 'leather' ? (
         <AreaField name={much} label="Area" help="24.75 or 24³" />
       ) : (
-        <NumberField name={much} label="How many" help={packs} />
+        <NumberField
+          name={much}
+          label="How many"
+          unit={unit === 'piece' ? undefined : unitWord(unit, 2)}
+          help={packs}
+        />
       )}
       <MoneyField
         name={`${line}.unitPrice`}
         label="Price"
-        per={of === 'leather' ? 'ft²' : 'piece'}
+        per={of === 'leather' ? 'ft²' : unitWord(unit)}
       />
       <button
         type="button"

@@ -117,15 +117,15 @@ function columnsFor(
       id: 'ordered',
       header: 'Ordered',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => goodsText(row, workshop),
+      cell: (row) => goodsText(row, workshop, row.unit),
       align: 'right',
     },
     {
       id: 'received',
       header: 'Received',
       value: (row) => row.receivedAreaMm2 ?? row.received,
-      cell: ({ receivedAreaMm2, received }) =>
-        goodsText({ areaMm2: receivedAreaMm2, quantity: received }, workshop),
+      cell: ({ receivedAreaMm2, received, unit }) =>
+        goodsText({ areaMm2: receivedAreaMm2, quantity: received }, workshop, unit),
       align: 'right',
     },
     {

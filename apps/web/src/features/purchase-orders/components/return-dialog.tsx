@@ -98,7 +98,7 @@ function WhatGoesBack({ choices }: { choices: readonly Choice[] }) {
         </SelectInput>
       </Field>
       {chosen?.values.of === 'hardware' ? (
-        <NumberField name="quantity" label="How many" unit="pieces" />
+        <NumberField name="quantity" label="How many" />
       ) : (
         <p className="text-ink-soft">All that is left of it goes back.</p>
       )}

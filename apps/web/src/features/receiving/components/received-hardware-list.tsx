@@ -1,4 +1,5 @@
 import type { PurchaseLine } from '@hidewright/contract';
+import { countedWords, unitWord } from '@hidewright/domain';
 import { Plus } from 'lucide-react';
 import { useFieldArray } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
@@ -6,7 +7,6 @@ import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
-import { countText } from '../../../lib/formatting.ts';
 import { blankHardware, isOpen, type TypedHardware } from '../typed-delivery.ts';
 
 interface ReceivedHardwareListProps {
@@ -94,7 +94,7 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
           {line?.name ?? `Hardware ${at + 1}`}
           {line && (
             <span className="block text-sm font-normal text-ink-soft">
-              {countText(restOf(line) ?? 0)} to come
+              {countedWords(restOf(line) ?? 0, line.unit ?? 'piece')} to come
             </span>
           )}
         </p>
@@ -116,7 +116,11 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
             choices={hardware}
           />
         )}
-        <NumberField name={`${row}.quantity`} label="Came" unit="pieces" />
+        <NumberField
+          name={`${row}.quantity`}
+          label="Came"
+          unit={line?.unit && unitWord(line.unit, 2)}
+        />
         <TextField name={`${row}.batch`} label="Batch" optional help="As printed on the bag." />
         {mayPrice && (
           <MoneyField

@@ -1,4 +1,5 @@
 import { adjustStock, type ReplyOf } from '@hidewright/contract';
+import { unitWord, type HardwareUnit } from '@hidewright/domain';
 import { useState, type ReactNode } from 'react';
 import { AreaField } from '../../../components/area-field.tsx';
 import { Form } from '../../../components/form.tsx';
@@ -16,10 +17,12 @@ type Adjusted = ReplyOf<typeof adjustStock>;
 
 interface AdjustFormProps {
   item: { of: 'lot'; lotId: number } | { of: 'hardware'; hardwareId: number };
+  /** What one of the hardware is. */
+  unit?: HardwareUnit | undefined;
 }
 
 /** Sets the books to what is really there, and says which jobs that leaves short. */
-export function AdjustForm({ item }: AdjustFormProps) {
+export function AdjustForm({ item, unit = 'piece' }: AdjustFormProps) {
   const adjust = useAdjustStock();
   const [done, setDone] = useState<Adjusted>();
   const workshop = useWorkshop();
@@ -50,7 +53,7 @@ export function AdjustForm({ item }: AdjustFormProps) {
           />
         ) : (
           <>
-            <NumberField name="counted" label="Counted now" unit="pieces" />
+            <NumberField name="counted" label="Counted now" unit={unitWord(unit, 2)} />
             <WeighInto name="counted" />
           </>
         )}
