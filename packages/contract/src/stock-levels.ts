@@ -1,12 +1,13 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
 import { day, id } from './fields.ts';
 
-/** How it stands today beside what is there; none of an earlier day, since only what moved is kept. */
+/** How it stood at the end of the day beside what was there. */
 const standing = z
   .object({
-    /** On the shelf and held for jobs. */
+    /** On the shelf, and held for jobs. */
     reserved: z.string(),
     free: z.string(),
     /** Ordered from suppliers and not here yet. */
@@ -47,7 +48,7 @@ export const leatherLevel = z
     areaMm2: z.string(),
     value: confidential(z.string()),
     /** Areas in mm². */
-    standing: standing.nullable(),
+    standing,
     lots: z.array(lotLevel),
   })
   .meta({ id: 'LeatherLevel' });
@@ -58,10 +59,11 @@ export const hardwareLevel = z
     hardwareId: id,
     name: z.string(),
     kind: z.enum(['hardware', 'supplies']),
+    unit: z.enum(hardwareUnits),
     quantity: z.int(),
     value: confidential(z.string()),
-    /** In pieces. */
-    standing: standing.nullable(),
+    /** In units. */
+    standing,
   })
   .meta({ id: 'HardwareLevel' });
 export type HardwareLevel = z.infer<typeof hardwareLevel>;

@@ -36,6 +36,7 @@ import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
 import { Quote } from '../modules/quotes/quote.entity.ts';
 import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
 import { Receipt } from '../modules/receipts/receipt.entity.ts';
+import { ReservationMovement } from '../modules/stock/reservation-movement.entity.ts';
 import { Reservation } from '../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
@@ -92,6 +93,7 @@ export const entities = [
   Receipt,
   ReceiptLine,
   Reservation,
+  ReservationMovement,
   StandIn,
   StockBalance,
   StockMovement,

@@ -52,6 +52,12 @@ export async function faultsOf(em: EntityManager, broken: ReadonlySet<string>): 
        CASE WHEN l.received > 0 OR p.state = 'sent' THEN l.quantity ELSE 0 END`,
   );
   faults.push(...unequal.map(({ fault }) => fault));
+  const held = await em.execute<{ fault: string }[]>(
+    `SELECT 'I1: reservation ' || r.id || ' holds ' || r.open || ', its rows ' || COALESCE(SUM(m.quantity), 0) AS fault
+     FROM reservation r LEFT JOIN reservation_movement m ON m.reservation_id = r.id
+     GROUP BY r.id HAVING COALESCE(SUM(m.quantity), 0) <> r.open`,
+  );
+  faults.push(...held.map(({ fault }) => fault));
   const short = await em.execute<{ lot: number | null; hardware: number | null }[]>(
     `SELECT lot_id AS lot, hardware_id AS hardware FROM stock_balance WHERE reserved > on_hand OR on_hand < 0`,
   );

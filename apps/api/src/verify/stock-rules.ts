@@ -24,6 +24,13 @@ export const stockRules: Rule[] = [
     WHERE held <> b.reserved`,
   ),
   none(
+    'What a reservation holds equals the sum of its rows',
+    `SELECT 'reservation ' || r.id || ' holds ' || r.open || ', its rows sum to ' || moved AS fault FROM (
+      SELECT r.*, (SELECT COALESCE(SUM(quantity), 0) FROM reservation_movement m
+        WHERE m.reservation_id = r.id) AS moved FROM reservation r) r
+    WHERE moved <> r.open`,
+  ),
+  none(
     'A finished job holds nothing',
     `SELECT j.number || ' is finished and still holds stock' AS fault FROM reservation r JOIN job j ON j.id = r.job_id
     WHERE j.state = 'finished' AND r.open > 0`,

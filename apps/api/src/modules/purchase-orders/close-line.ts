@@ -1,6 +1,7 @@
 import { notFound, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
+import { noteAwaited } from './note-awaited.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
 
@@ -26,7 +27,7 @@ export async function closeLine(
   const from = order.state;
   line.closed = true;
   if (othersDone) order.state = 'received';
-  await work.em.flush();
+  await noteAwaited(work, order);
   // The line is part of the order, so that the order's version rises with it.
   await work.em.nativeUpdate(PurchaseOrder, { id: order.id }, { note: order.note });
   await work.em.refresh(order);

@@ -15,6 +15,7 @@ import { Hardware } from '../hardware/hardware.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { requireBookable } from './line-amount.ts';
+import { noteAwaited } from './note-awaited.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
 import { keepService, type GoesOut } from './service-line.ts';
@@ -92,7 +93,7 @@ export async function cancelPurchaseOrder(
   }
   const from = order.state;
   order.state = 'cancelled';
-  await work.em.flush();
+  await noteAwaited(work, order);
   await log(work, order, `cancelled purchase order ${order.number}`, {
     from,
     to: 'cancelled',

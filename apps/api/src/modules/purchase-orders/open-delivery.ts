@@ -2,6 +2,7 @@ import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { findPurchaseOrder } from './draft-purchase-order.ts';
+import { noteAwaited } from './note-awaited.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
 import { receivedMeanwhile } from './received-meanwhile.ts';
@@ -116,7 +117,7 @@ export class OpenDelivery {
     if (came) order.receipts += 1;
     const complete = this.#lines.every((line) => line.closed || line.received >= line.quantity);
     order.state = complete || nothingMore ? 'received' : 'part received';
-    await this.#work.em.flush();
+    await noteAwaited(this.#work, order);
     await logDeed(this.#work, {
       action: `received ${order.state === 'received' ? 'the last' : 'a part'} of purchase order ${order.number}`,
       subjectKind: 'purchase order',

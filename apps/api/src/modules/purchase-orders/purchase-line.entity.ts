@@ -34,6 +34,10 @@ export class PurchaseLine {
   @Property({ type: 'boolean', columnType: 'integer', runtimeType: 'boolean' })
   closed = false;
 
+  /** The day since which nothing more of it is awaited: all is here, it is closed, or the order is; null until then. */
+  @Property({ type: 'text', columnType: 'text', nullable: true })
+  awaitedUntil: string | null = null;
+
   /** When the rest of it is awaited, where that is another day than the order's. */
   @Property({ type: 'text', columnType: 'text', nullable: true })
   expectedOn: string | null = null;

@@ -1,6 +1,7 @@
 import { invalid, notFound, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
+import { noteAwaited } from './note-awaited.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
 
@@ -30,7 +31,7 @@ export async function reopenLines(work: Work, order: PurchaseOrder, asked: Asked
   for (const each of short) each.closed = !wanted.includes(each);
   for (const each of wanted) each.expectedOn = expectedOn ?? each.expectedOn;
   if (order.state === 'received') order.state = 'part received';
-  await work.em.flush();
+  await noteAwaited(work, order);
   // The lines are part of the order, so that the order's version rises with them.
   await work.em.nativeUpdate(PurchaseOrder, { id: order.id }, { note: order.note });
   await work.em.refresh(order);

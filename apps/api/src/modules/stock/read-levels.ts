@@ -4,13 +4,15 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
 import { readOutAt } from './out-at.ts';
-import { readStandings, type Standings } from './read-standings.ts';
+import { readStandingsAt } from './read-standings-at.ts';
+import { readStandings } from './read-standings.ts';
+import type { Standings } from './standings.ts';
 
 interface Asked {
   /** The day whose end is meant. */
   on: string;
-  /** Only then it is known what is held and promised. */
-  isToday: boolean;
+  /** The instant at which the day was over in the shop; null for today, which is still going on. */
+  over: string | null;
   hardwareId?: number | undefined;
   leatherId?: number | undefined;
 }
@@ -21,7 +23,6 @@ interface LotRow {
   form: string;
   place: string;
   leather_id: number;
-  leather_name: string;
   quantity: number;
   value: number;
 }
@@ -30,27 +31,31 @@ interface HardwareRow {
   id: number;
   name: string;
   kind: HardwareLevel['kind'];
+  unit: HardwareLevel['unit'];
   quantity: number;
   value: number;
 }
 
 /** What the ledger says was there at the end of a day, and what it was worth; the place of a lot is where it lies now. */
 export async function readLevels(em: EntityManager, asked: Asked): Promise<StockLevels> {
-  const standings = asked.isToday ? await readStandings(em) : undefined;
+  const { on, over } = asked;
+  const standings =
+    over === null ? await readStandings(em) : await readStandingsAt(em, { on, over });
   const lots = asked.hardwareId === undefined ? await readLotRows(em, asked) : [];
   const pieces = asked.leatherId === undefined ? await readHardwareRows(em, asked) : [];
   const out = asked.hardwareId === undefined ? await readOutAt(em, asked) : [];
   const [leatherValue, hardwareValue] = [sumOf(lots, 'value'), sumOf(pieces, 'value')];
   return {
-    on: asked.on,
-    leathers: leathersOf(lots, standings),
+    on,
+    leathers: await readLeathers(em, asked, { lots, standings }),
     hardware: pieces.map((row) => ({
       hardwareId: row.id,
       name: row.name,
       kind: row.kind,
+      unit: row.unit,
       quantity: row.quantity,
       value: money(row.value),
-      standing: standings?.ofHardware(row.id) ?? null,
+      standing: standings.ofHardware(row.id),
     })),
     leatherAreaMm2: area(sumOf(lots, 'quantity')),
     leatherValue: money(leatherValue),
@@ -83,10 +88,10 @@ function readLotRows(em: EntityManager, { on, leatherId }: Asked): Promise<LotRo
     ...when(leatherId, 'lot.leather_id = ?'),
   ]);
   return em.execute(
-    `SELECT lot.id AS lot_id, lot.tag, lot.form, lot.place, lot.leather_id, leather.name AS leather_name,
+    `SELECT lot.id AS lot_id, lot.tag, lot.form, lot.place, lot.leather_id,
        SUM(m.quantity) AS quantity, SUM(m.value) AS value
-     FROM stock_movement m JOIN lot ON lot.id = m.lot_id JOIN leather ON leather.id = lot.leather_id
-     ${where} GROUP BY lot.id HAVING SUM(m.quantity) <> 0 ORDER BY leather.name, lot.tag`,
+     FROM stock_movement m JOIN lot ON lot.id = m.lot_id
+     ${where} GROUP BY lot.id HAVING SUM(m.quantity) <> 0 ORDER BY lot.tag`,
     values,
   );
 }
@@ -95,7 +100,7 @@ function readLotRows(em: EntityManager, { on, leatherId }: Asked): Promise<LotRo
 function readHardwareRows(em: EntityManager, { on, hardwareId }: Asked): Promise<HardwareRow[]> {
   const { where, values } = whereAll(when(hardwareId, 'h.id = ?'));
   return em.execute(
-    `SELECT h.id, h.name, h.kind, COALESCE(SUM(m.quantity), 0) AS quantity, COALESCE(SUM(m.value), 0) AS value
+    `SELECT h.id, h.name, h.kind, h.unit, COALESCE(SUM(m.quantity), 0) AS quantity, COALESCE(SUM(m.value), 0) AS value
      FROM hardware h LEFT JOIN stock_movement m ON m.hardware_id = h.id AND m.day <= ?
      ${where} GROUP BY h.id
      HAVING COALESCE(SUM(m.quantity), 0) <> 0
@@ -105,24 +110,36 @@ function readHardwareRows(em: EntityManager, { on, hardwareId }: Asked): Promise
   );
 }
 
-function leathersOf(rows: readonly LotRow[], standings: Standings | undefined): LeatherLevel[] {
-  const byLeather = new Map<number, LotRow[]>();
-  for (const row of rows) {
-    byLeather.set(row.leather_id, [...(byLeather.get(row.leather_id) ?? []), row]);
-  }
-  return [...byLeather].map(([leatherId, lots]) => ({
-    leatherId,
-    name: lots[0]?.leather_name ?? '',
-    areaMm2: area(sumOf(lots, 'quantity')),
-    value: money(sumOf(lots, 'value')),
-    standing: standings?.ofLeather(leatherId) ?? null,
-    lots: lots.map((row) => ({
-      lotId: row.lot_id,
-      tag: row.tag,
-      form: row.form,
-      place: row.place,
-      areaMm2: area(row.quantity),
-      value: money(row.value),
-    })),
-  }));
+/** Leather that hangs there, and what has none left of which some is on order or promised: a nought is an answer too. */
+async function readLeathers(
+  em: EntityManager,
+  { hardwareId, leatherId }: Asked,
+  { lots, standings }: { lots: readonly LotRow[]; standings: Standings },
+): Promise<LeatherLevel[]> {
+  if (hardwareId !== undefined) return [];
+  const { where, values } = whereAll(when(leatherId, 'leather.id = ?'));
+  const kinds = await em.execute<{ id: number; name: string }[]>(
+    `SELECT id, name FROM leather ${where} ORDER BY name`,
+    values,
+  );
+  return kinds.flatMap(({ id, name }) => {
+    const own = lots.filter((row) => row.leather_id === id);
+    const standing = standings.ofLeather(id);
+    if (own.length === 0 && standing.onOrder === '0' && standing.promised === '0') return [];
+    return [
+      {
+        ...{ leatherId: id, name, standing },
+        areaMm2: area(sumOf(own, 'quantity')),
+        value: money(sumOf(own, 'value')),
+        lots: own.map((row) => ({
+          lotId: row.lot_id,
+          tag: row.tag,
+          form: row.form,
+          place: row.place,
+          areaMm2: area(row.quantity),
+          value: money(row.value),
+        })),
+      },
+    ];
+  });
 }

@@ -1,24 +1,5 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
-import type { HardwareLevel } from '@hidewright/contract';
-import { unscaled } from '../../db/columns/scaled-decimal.ts';
-
-type Standing = NonNullable<HardwareLevel['standing']>;
-
-/** What is held, free, on its way and promised of it. */
-export interface Standings {
-  /** In pieces. */
-  ofHardware(id: number): Standing;
-  /** In mm². */
-  ofLeather(id: number): Standing;
-}
-
-interface Row {
-  id: number;
-  reserved: number;
-  free: number;
-  on_order: number;
-  promised: number;
-}
+import { standingsOf, type Standings } from './standings.ts';
 
 const onOrder = (column: string, id: string) => `COALESCE((
   SELECT SUM(l.quantity - l.received) FROM purchase_line l JOIN purchase_order p ON p.id = l.purchase_order_id
@@ -62,22 +43,7 @@ const leatherSql = `SELECT leather.id,
     ${onOrder('leather_id', 'leather.id')} AS on_order, ${promisedLeather} AS promised
   FROM leather`;
 
+/** How everything stands now. */
 export async function readStandings(em: EntityManager): Promise<Standings> {
-  const hardware = byId(await em.execute<Row[]>(hardwareSql));
-  const leathers = byId(await em.execute<Row[]>(leatherSql));
-  return {
-    ofHardware: (id) => standingOf(hardware.get(id), String),
-    ofLeather: (id) => standingOf(leathers.get(id), (kept) => unscaled(kept, 3).toFixed()),
-  };
-}
-
-const byId = (rows: readonly Row[]): Map<number, Row> => new Map(rows.map((row) => [row.id, row]));
-
-function standingOf(row: Row | undefined, text: (kept: number) => string): Standing {
-  return {
-    reserved: text(row?.reserved ?? 0),
-    free: text(row?.free ?? 0),
-    onOrder: text(row?.on_order ?? 0),
-    promised: text(row?.promised ?? 0),
-  };
+  return standingsOf(await em.execute(hardwareSql), await em.execute(leatherSql));
 }

@@ -1,3 +1,4 @@
+import { addDays } from '@hidewright/domain';
 import fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Job, StockCount, StockReservation } from '@hidewright/contract';
@@ -9,6 +10,11 @@ import {
   type StockStand,
 } from '../../testing/stock-invariants.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
+import { dayIn, endOfDay } from '../../day-in.ts';
+import { Workshop } from '../workshop/workshop.entity.ts';
+import { readStandingsAt } from './read-standings-at.ts';
+import { readStandings } from './read-standings.ts';
+import type { Standings } from './standings.ts';
 
 const sequences = process.env['DRILL_SIZE'] === 'full' ? 1000 : 150;
 
@@ -30,6 +36,7 @@ async function openShop(): Promise<void> {
   ready = await readyForTheBench(await startTestShop());
   for (const kept of [jobIds, lotIds, orderIds, workIds]) kept.length = 0;
   broken.clear();
+  days.clear();
   supplierId = ((await send('owner', '/suppliers', { name: 'Oldbeck Tannery' })) as { id: number })
     .id;
   lotIds.push(ready.lotId);
@@ -235,6 +242,30 @@ const command = fc.record({
   much: fc.integer({ min: 0, max: 30 }),
 });
 
+/** What was held, free, on order and promised at the end of each day so far. */
+const days = new Map<string, unknown>();
+
+/** Goes on to the next day. How things stood is told of every day before as it was told on that day. */
+async function endTheDay(): Promise<void> {
+  const em = ready.shop.context.orm.em.fork();
+  const timeZone = (await em.findOneOrFail(Workshop, 1)).timeZone;
+  const told = ({ ofLeather, ofHardware }: Standings) => ({
+    leather: ofLeather(ready.leatherId),
+    hardware: ofHardware(ready.hardwareId),
+  });
+  const on = dayIn(timeZone, ready.shop.clock.now());
+  days.set(on, told(await readStandings(em)));
+  ready.shop.clock.set(new Date(`${addDays(on, 1)}T09:00:00.000Z`));
+  // Nobody has to sign in anew for it.
+  await em.execute(`UPDATE web_session SET expires_at = '2027-12-01', created_at = ?`, [
+    ready.shop.clock.now().toISOString(),
+  ]);
+  for (const [day, stood] of days) {
+    const over = endOfDay(timeZone, day).toISOString();
+    expect(told(await readStandingsAt(em, { on: day, over })), day).toEqual(stood);
+  }
+}
+
 async function step(each: Command, before: StockStand): Promise<StockStand> {
   const em = ready.shop.context.orm.em.fork();
   const role = await commands[each.verb](each);
@@ -258,6 +289,7 @@ describe('whatever is done in the stockroom, in whatever order', () => {
         played += 1;
         let stand = await readStand(ready.shop.context.orm.em.fork());
         for (const each of all) stand = await step(each, stand);
+        await endTheDay();
       }),
       { numRuns: sequences, endOnFailure: true },
     );

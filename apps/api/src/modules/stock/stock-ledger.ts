@@ -4,9 +4,9 @@ import { invalid, wrongState } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { describeItem } from './described-item.ts';
 import { Reservation } from './reservation.entity.ts';
-import { balanceOf, move } from './stock-rows.ts';
+import { move, moveHeld } from './stock-rows.ts';
 import { StockBalance } from './stock-balance.entity.ts';
-import { itemOf, keysOf, type StockItem } from './stock-item.ts';
+import { keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
 import { notFreeToGo, requireQuantity, tooLittle } from './stock-refusals.ts';
 import { costOfChange, costOfGoing, shareOfCost } from './stock-value.ts';
@@ -79,15 +79,10 @@ export async function reserveStock(
   const { free } = await freeOf(work.em, asked);
   if (asked.quantity > free)
     throw await tooLittle(work, asked, { asked: asked.quantity, most: free });
-  const balance = await balanceOf(work.em, asked);
-  balance.reserved += asked.quantity;
   const { jobId, quantity } = asked;
-  const reservation = work.em.create(Reservation, {
-    ...keysOf(asked),
-    jobId,
-    quantity,
-    open: quantity,
-  });
+  const reservation = work.em.create(Reservation, { ...keysOf(asked), jobId, quantity, open: 0 });
+  await work.em.flush();
+  await moveHeld(work, reservation, quantity);
   await work.em.flush();
   return reservation;
 }
@@ -105,7 +100,7 @@ export async function takeStock(work: Work, asked: Taken & StockItem): Promise<S
   const most = Math.min(onHand, own + free);
   if (quantity > most) throw await tooLittle(work, asked, { asked: quantity, most });
   const value = (await costOfGoing(work.em, asked, quantity)).negated();
-  await useHeld(work.em, held, quantity);
+  await useHeld(work, held, quantity);
   return move(work, asked, { kind: 'take', quantity: -quantity, value, jobId, reason });
 }
 
@@ -282,10 +277,8 @@ export async function releaseReservations(
 ): Promise<number> {
   let released = 0;
   for (const reservation of await openReservations(work.em, { jobId, ...(item && keysOf(item)) })) {
-    const balance = await balanceOf(work.em, itemOf(reservation));
-    balance.reserved -= reservation.open;
     released += reservation.open;
-    reservation.open = 0;
+    await moveHeld(work, reservation, -reservation.open);
   }
   await work.em.flush();
   return released;
@@ -298,13 +291,11 @@ async function openReservations(
   return em.find(Reservation, { ...where, open: { $gt: 0 } }, { orderBy: { id: 'asc' } });
 }
 
-async function useHeld(em: EntityManager, held: Reservation[], quantity: number): Promise<void> {
+async function useHeld(work: Work, held: Reservation[], quantity: number): Promise<void> {
   let left = quantity;
   for (const reservation of held) {
     const used = Math.min(left, reservation.open);
-    const balance = await balanceOf(em, itemOf(reservation));
-    balance.reserved -= used;
-    reservation.open -= used;
+    if (used > 0) await moveHeld(work, reservation, -used);
     left -= used;
   }
 }

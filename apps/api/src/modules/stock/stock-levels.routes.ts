@@ -6,6 +6,7 @@ import {
   type QueryOf,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { endOfDay } from '../../day-in.ts';
 import { invalid } from '../../http/problem.ts';
 import { serve, serveFile } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
@@ -49,7 +50,9 @@ export function stockLevelRoutes(context: Context): Router {
 
 const seesValues = ({ actor }: Work): boolean => actor.role !== 'maker';
 
-function levelsOn(work: Work, { on = work.today, ...item }: QueryOf<typeof readStockLevels>) {
+async function levelsOn(work: Work, { on = work.today, ...item }: QueryOf<typeof readStockLevels>) {
   if (on > work.today) throw invalid([{ field: 'on', message: 'Choose today or an earlier day.' }]);
-  return readLevels(work.em, { on, isToday: on === work.today, ...item });
+  const { timeZone } = await work.em.findOneOrFail(Workshop, 1);
+  const over = on === work.today ? null : endOfDay(timeZone, on).toISOString();
+  return readLevels(work.em, { on, over, ...item });
 }

@@ -4,7 +4,7 @@ import { ft2, orderMore, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { inTransaction, theProgram } from '../../work.ts';
 import { writeBareJob } from '../../testing/bare-job.ts';
-import { reserveStock, takeStock } from './stock-ledger.ts';
+import { releaseReservations, reserveStock, takeStock } from './stock-ledger.ts';
 
 let shop: Awaited<ReturnType<typeof startTestShop>>;
 let things: Awaited<ReturnType<typeof stockUp>>;
@@ -38,7 +38,7 @@ beforeAll(async () => {
     await takeStock(work, { jobId, hardwareId, quantity: 300, reason: 'for it' });
     await reserveStock(work, { jobId, hardwareId, quantity: 400 });
   });
-  at('2026-12-01');
+  at('2026-11-29');
   await orderMore(shop, things);
 });
 afterAll(() => shop.close());
@@ -46,11 +46,13 @@ afterAll(() => shop.close());
 describe('what there was at the end of a day', () => {
   it('is nothing before anything came', async () => {
     expect(await levels({ on: '2026-11-01' })).toMatchObject({ leathers: [], value: '0.00' });
+    const [hardware] = (await levels({ on: '2026-11-01' })).hardware;
+    expect(hardware.standing).toEqual({ reserved: '0', free: '0', onOrder: '0', promised: '0' });
   });
 
   it('is what had moved until then, at cost', async () => {
     expect(await levels({ on: '2026-11-19' })).toMatchObject({
-      leathers: [{ areaMm2: ft2(20), value: '180.00', standing: null }],
+      leathers: [{ areaMm2: ft2(20), value: '180.00', standing: { free: ft2(20), promised: '0' } }],
       hardware: [{ quantity: 1000, value: '170.00' }],
       value: '350.00',
     });
@@ -72,6 +74,22 @@ describe('what there was at the end of a day', () => {
     const { hardwareId } = things;
     const one = await levels({ hardwareId });
     expect(one).toMatchObject({ leathers: [], hardware: [{ hardwareId }] });
+  });
+
+  it('stood on a day before as it was told on that day', async () => {
+    const before = await levels({ on: '2026-11-28' });
+    expect(before.hardware[0]).toMatchObject({
+      quantity: 700,
+      standing: { reserved: '400', free: '300', onOrder: '0', promised: '200' },
+    });
+    expect(before.leathers[0].standing).toMatchObject({ free: ft2(15), onOrder: '0' });
+    const today = await levels();
+    at('2026-12-01');
+    await inTransaction(shop.context, theProgram, (work) => releaseReservations(work, jobId));
+    const { on: _, ...stood } = await levels({ on: '2026-11-29' });
+    expect(today).toMatchObject(stood);
+    expect((await levels({ on: '2026-11-30' })).hardware[0].standing.reserved).toBe('400');
+    expect((await levels()).hardware[0].standing).toMatchObject({ reserved: '0', free: '700' });
   });
 
   it('is not told of days to come', async () => {

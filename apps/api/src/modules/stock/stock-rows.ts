@@ -2,8 +2,10 @@ import type { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { Work } from '../../work.ts';
 import { refuseKit } from './refuse-kit.ts';
+import { ReservationMovement } from './reservation-movement.entity.ts';
+import type { Reservation } from './reservation.entity.ts';
 import { StockBalance } from './stock-balance.entity.ts';
-import { keysOf, type StockItem } from './stock-item.ts';
+import { itemOf, keysOf, type StockItem } from './stock-item.ts';
 import { StockMovement } from './stock-movement.entity.ts';
 
 /* The rows that the ledger writes: nobody else does. */
@@ -37,6 +39,23 @@ export async function move(
   });
   await work.em.flush();
   return row;
+}
+
+/** What a reservation holds grows or shrinks, and with it what is held of the item; whoever asks flushes. */
+export async function moveHeld(
+  work: Work,
+  reservation: Reservation,
+  quantity: number,
+): Promise<void> {
+  const balance = await balanceOf(work.em, itemOf(reservation));
+  balance.reserved += quantity;
+  reservation.open += quantity;
+  work.em.create(ReservationMovement, {
+    reservationId: reservation.id,
+    at: work.now.toISOString(),
+    day: work.today,
+    quantity,
+  });
 }
 
 /** What is on hand of an item, as a row of its own; a new one where nothing ever was. */

@@ -37,18 +37,19 @@ describe('what was on hand, as a spreadsheet', () => {
   it('has a page for the leather that was out', () => {
     const { pages } = levelsSheet(workshop, levels, true);
     expect(pages.map(({ name }) => name)).toEqual([
+      'Leather in all 2026-12-02',
       'Leather 2026-12-02',
       'Hardware 2026-12-02',
       'Out 2026-12-02',
     ]);
-    expect(pages[2]?.rows).toEqual([
+    expect(pages[3]?.rows).toEqual([
       ['Oak tan', 'T-0005', 'dyeing', 'Fenside Dye Works', 'P-0011', '10', '90.00'],
     ]);
   });
 
   it('leaves the costs out for the maker, and the page where nothing was out', () => {
     const { pages } = levelsSheet(workshop, levels, false);
-    expect(pages[2]?.rows[0]).not.toContain('90.00');
-    expect(levelsSheet(workshop, { ...levels, out: [] }, true).pages).toHaveLength(2);
+    expect(pages[3]?.rows[0]).not.toContain('90.00');
+    expect(levelsSheet(workshop, { ...levels, out: [] }, true).pages).toHaveLength(3);
   });
 });

@@ -1,4 +1,4 @@
-import type { StockLevels, StockMovement } from '@hidewright/contract';
+import type { HardwareLevel, StockLevels, StockMovement } from '@hidewright/contract';
 import { convert, toAtMost } from '@hidewright/domain';
 import type { ListSheet } from '../../papers/list-sheet.ts';
 import type { Workshop } from '../workshop/workshop.entity.ts';
@@ -22,7 +22,15 @@ const withValue = (shown: boolean, column: Column) => (shown ? [column] : []);
 const valueCell = (shown: boolean, value: string | undefined): Cell[] =>
   shown ? [value ?? null] : [];
 
-/** What was there at the end of a day: lot by lot, then hardware and supplies, then leather that was out. */
+const standingWords = ['Held for jobs', 'Free', 'On order', 'Promised of it'];
+const standingOf = ({ reserved, free, onOrder, promised }: HardwareLevel['standing']) => [
+  reserved,
+  free,
+  onOrder,
+  promised,
+];
+
+/** What was there at the end of a day: leather in all and lot by lot, then hardware and supplies, then leather that was out. */
 export function levelsSheet(workshop: Workshop, levels: StockLevels, values: boolean): ListSheet {
   const unit = areaSigns[workshop.areaUnit];
   const worth = withValue(values, column(`At cost, ${workshop.currency}`, 'money'));
@@ -47,18 +55,32 @@ export function levelsSheet(workshop: Workshop, levels: StockLevels, values: boo
       ]),
     ),
   };
+  const inAll: Page = {
+    name: `Leather in all ${levels.on}`,
+    columns: [
+      column('Leather', 'text', 32),
+      ...['On hand', ...standingWords].map((word) => column(`${word}, ${unit}`, 'measure')),
+      ...worth,
+    ],
+    rows: levels.leathers.map(({ name, areaMm2, standing, value }) => [
+      name,
+      ...[areaMm2, ...standingOf(standing)].map((each) => area(workshop, each)),
+      ...valueCell(values, value),
+    ]),
+  };
   const hardware: Page = {
     name: `Hardware ${levels.on}`,
     columns: [
       column('Name', 'text', 32),
       column('Kind', 'text'),
+      column('Unit', 'text'),
       column('On hand', 'count'),
+      ...standingWords.map((word) => column(word, 'count')),
       ...worth,
     ],
-    rows: levels.hardware.map(({ name, kind, quantity, value }) => [
-      name,
-      kind,
-      quantity,
+    rows: levels.hardware.map(({ name, kind, unit, quantity, standing, value }) => [
+      ...[name, kind, unit, quantity],
+      ...standingOf(standing).map(Number),
       ...valueCell(values, value),
     ]),
   };
@@ -83,7 +105,7 @@ export function levelsSheet(workshop: Workshop, levels: StockLevels, values: boo
       ...valueCell(values, row.value),
     ]),
   };
-  const pages = levels.out.length === 0 ? [leather, hardware] : [leather, hardware, out];
+  const pages = [inAll, leather, hardware, ...(levels.out.length === 0 ? [] : [out])];
   return { workshopName: workshop.name, pages };
 }
 

@@ -1,4 +1,5 @@
 import type { HardwareLevel, LeatherLevel, StockLevels } from '@hidewright/contract';
+import { unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { useMemo } from 'react';
 import type { Column } from '../../../components/column.ts';
@@ -48,15 +49,13 @@ function columnsFor(
       align: 'right',
       total: total ? sum((row) => row.onHand) : undefined,
     },
-    ...(rows.some((row) => row.standing)
-      ? standing.map(([field, header]): Column<Level> => ({
-          id: field,
-          header,
-          value: (row) => row.standing?.[field],
-          cell: (row) => say(row.standing?.[field] ?? '0'),
-          align: 'right',
-        }))
-      : []),
+    ...standing.map(([field, header]): Column<Level> => ({
+      id: field,
+      header,
+      value: (row) => row.standing[field],
+      cell: (row) => say(row.standing[field]),
+      align: 'right',
+    })),
     ...(rows.some((row) => row.value !== undefined)
       ? [
           {
@@ -72,6 +71,11 @@ function columnsFor(
   ];
 }
 
+function lotsWord(count: number): string {
+  if (count === 0) return 'no lot';
+  return count === 1 ? '1 lot' : `${count} lots`;
+}
+
 /** What there is of each leather. */
 export function LeatherLevels({ levels }: { levels: StockLevels }) {
   const workshop = useWorkshop();
@@ -81,7 +85,7 @@ export function LeatherLevels({ levels }: { levels: StockLevels }) {
       levels.leathers.map(({ leatherId, areaMm2, lots, name, ...level }) => ({
         ...level,
         id: leatherId,
-        name: `${name}, ${lots.length === 1 ? '1 lot' : `${lots.length} lots`}`,
+        name: `${name}, ${lotsWord(lots.length)}`,
         to: `/stockroom/leather/${leatherId}`,
         onHand: areaMm2,
       })),
@@ -107,8 +111,9 @@ export function HardwareLevels({ levels }: { levels: StockLevels }) {
   const { currency } = useWorkshop();
   const rows = useMemo(
     () =>
-      levels.hardware.map(({ hardwareId, quantity, ...level }) => ({
+      levels.hardware.map(({ hardwareId, quantity, name, unit, ...level }) => ({
         ...level,
+        name: unit === 'piece' ? name : `${name}, in ${unitWord(unit, 2)}`,
         id: hardwareId,
         to: `/stockroom/hardware/${hardwareId}`,
         onHand: String(quantity),

@@ -8,7 +8,7 @@ import { levelsQuery } from '../stock.queries.ts';
 export function StandingCard({ hardwareId }: { hardwareId: number }) {
   const { data } = useQuery(levelsQuery({ hardwareId }));
   const [level] = data?.hardware ?? [];
-  if (!level?.standing) return null;
+  if (level === undefined) return null;
   const { onOrder, promised } = level.standing;
   const still = Number(onOrder) - Number(promised);
   return (
