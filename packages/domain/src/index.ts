@@ -145,6 +145,7 @@ export * from './buying/line-progress.ts';
 export * from './promise/day.ts';
 export * from './promise/workdays.ts';
 export type { Bench, WorkPart } from './promise/bench-time.ts';
+export { partsOf } from './promise/held-work.ts';
 export type { HeldWork } from './promise/held-work.ts';
 export { doneOn } from './promise/elapsed-days.ts';
 export { planDays } from './promise/plan-days.ts';

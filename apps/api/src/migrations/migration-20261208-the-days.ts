@@ -14,6 +14,7 @@ const tables = [
   ) STRICT`,
   `CREATE INDEX reservation_movement_reservation ON reservation_movement (reservation_id)`,
   ...appendOnly('reservation_movement'),
+  `CREATE INDEX stock_movement_job ON stock_movement (job_id) WHERE job_id IS NOT NULL`,
   `ALTER TABLE purchase_line ADD COLUMN awaited_until TEXT`,
 ];
 

@@ -1,12 +1,12 @@
 import { usableOf, type ItemStock, type LeatherStock, type ShopStock } from '@hidewright/domain';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { Work } from '../../work.ts';
-import { benchToday, openJobs } from '../bench-load.ts';
 import { readItemSources, type ItemSource } from '../order-suggestions/item-sources.ts';
 import { boughtKinds, boughtLeathers, type BoughtLeather } from './bought-rows.ts';
 import { toRackLot, type LotRow } from './leather-for-check.ts';
 import { buyingFrom, readOnOrder, type OnOrder, type Wanted } from './on-order.ts';
-import { readOwedToJobs, type OwedToJobs } from './owed-to-jobs.ts';
+import { readOwedByStart } from './owed-by-start.ts';
+import type { OwedToJobs } from './owed-to-jobs.ts';
 import { readStandIns } from './stand-ins-for-check.ts';
 
 /** All that runs may be given, in as many questions to the database whatever lies on the rack; tools aside. */
@@ -22,12 +22,12 @@ export async function loadShopStock(
   const kinds = await boughtKinds(em, hardwareIds);
   const sourceOf = await readItemSources(em, today, { ...wanted, hardwareIds });
   const onOrder = await readOnOrder(em, today, { ...wanted, hardwareIds });
-  const owed = await readOwedToJobs(em);
+  const { bench, held, owed } = await readOwedByStart(work);
   const free = await freeHardware(work, hardwareIds);
   const stock = {
     today,
-    bench: await benchToday(work),
-    held: await openJobs(em),
+    bench,
+    held,
     leathers: leathers.map((leather) =>
       toLeatherStock(leather, {
         lots: lots.filter((row) => row.leather_id === leather.id).map(toRackLot),

@@ -3,151 +3,126 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { Decimal } from 'decimal.js';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
 import type { JobEstimate } from '../job-estimate.ts';
+import {
+  readHoldings,
+  type BrokenRow,
+  type DayOver,
+  type Holding,
+  type JobRow,
+} from './job-holdings.ts';
 import { readStandIns } from './stand-ins-for-check.ts';
 import { withoutStoodFor } from './stood-for.ts';
 
+/** What a job needs and does not have, on the day on which it is promised. */
+export interface OwedToJob extends Dated {
+  jobId: number;
+}
+
 /** What jobs that are not finished still need and do not hold, as the ledger counts: promised and not yet reserved. */
 export interface OwedToJobs {
-  hardware: (hardwareId: number) => Dated[];
-  leather: (leatherId: number) => Dated[];
+  hardware: (hardwareId: number) => OwedToJob[];
+  leather: (leatherId: number) => OwedToJob[];
 }
 
-interface JobRow {
-  id: number;
-  number: string;
-  title: string;
-  promised_on: string;
-  estimate: string;
-}
+type Item = { hardwareId: number } | { leatherId: number };
 
-interface HeldRow {
-  job_id: number;
-  hardware_id: number | null;
-  leather_id: number | null;
-  quantity: number;
-  open: number;
-}
-
-interface TakenRow {
-  job_id: number;
-  hardware_id: number | null;
-  leather_id: number | null;
-  taken: number;
-}
-
-interface Owed extends Dated {
+interface Owed extends OwedToJob {
   hardwareId?: number;
   leatherId?: number;
 }
 
-export async function readOwedToJobs(em: EntityManager): Promise<OwedToJobs> {
-  const jobs = await em.execute<JobRow[]>(
-    `SELECT j.id, j.number, o.title, o.promised_on, j.estimate FROM job j JOIN customer_order o ON o.id = j.order_id
-    WHERE j.state <> 'finished' AND o.state <> 'cancelled' ORDER BY o.promised_on, j.id`,
+/**
+ * What a job needs by its estimate, less what it holds and has taken, of the thing itself or in its place. Held and
+ * not there, since a count found less, is needed as well.
+ * @param then at the end of an earlier day; now, where it is left out
+ */
+export async function readOwedToJobs(
+  em: EntityManager,
+  then: DayOver | null = null,
+): Promise<OwedToJobs> {
+  const { jobs, holdings, broken } = await readHoldings(em, then);
+  const has = hadBy(holdings);
+  const needs = jobs.map((job) => ({ job, lines: linesOf(job) }));
+  const lacking = needs.flatMap(({ job, lines }) => lackingOf(job, lines, has));
+  const standIns = await readStandIns(em, [
+    ...new Set(lacking.flatMap(({ hardwareId }) => hardwareId ?? [])),
+  ]);
+  const needed = new Map(
+    needs.flatMap(({ job, lines }) =>
+      lines.map((line) => [keyOf(job.id, line), line.quantity] as const),
+    ),
   );
-  const ids = JSON.stringify(jobs.map(({ id }) => id));
-  const held = await em.execute<HeldRow[]>(
-    `SELECT r.job_id, r.hardware_id, l.leather_id, SUM(r.quantity) AS quantity, SUM(r.open) AS open
-    FROM reservation r LEFT JOIN lot l ON l.id = r.lot_id
-    WHERE r.job_id IN (SELECT value FROM json_each(?)) GROUP BY r.job_id, r.hardware_id, l.leather_id`,
-    [ids],
-  );
-  // Whoever held all of it owes nothing; only for the others does the long ledger have to be read.
-  const lacking = jobs.flatMap((job) => lackingOf(job, held));
-  const standIns = await readStandIns(em, hardwareOf(lacking));
-  const taken = lacking.length === 0 ? [] : await takenBy(em, lacking, standIns.partIds);
-  const missing = lacking
-    .map((each) => ({ ...each, quantity: each.quantity - takenBeyond(each, held, taken) }))
-    .filter(({ quantity }) => quantity > 0);
-  const short = new Set(missing.map(({ jobId }) => jobId));
-  const needs = neededBy(jobs.filter(({ id }) => short.has(id)));
-  const owed = withoutStoodFor(missing, standIns.of, (which) => {
-    const has = sumOf(held, which, (row) => row.open) + sumOf(taken, which, (row) => row.taken);
-    return has - needs(which);
+  const owed = withoutStoodFor(lacking, standIns.of, ({ jobId, hardwareId }) => {
+    const key = keyOf(jobId, { hardwareId });
+    return (has.get(key) ?? 0) - (needed.get(key) ?? 0);
   });
+  const byItem = groupedByItem([...owed, ...missingOf(broken, jobs)]);
   return {
-    hardware: (id) => owed.filter(({ hardwareId }) => hardwareId === id),
-    leather: (id) => owed.filter(({ leatherId }) => leatherId === id),
+    hardware: (hardwareId) => byItem.get(itemKey({ hardwareId })) ?? [],
+    leather: (leatherId) => byItem.get(itemKey({ leatherId })) ?? [],
   };
 }
 
-interface Lacking extends Owed {
-  jobId: number;
+function groupedByItem(owed: readonly Owed[]): Map<string, Owed[]> {
+  const byItem = new Map<string, Owed[]>();
+  for (const each of owed) {
+    const key = itemKey(each);
+    byItem.set(key, [...(byItem.get(key) ?? []), each]);
+  }
+  return byItem;
 }
 
-const hardwareOf = (lacking: readonly Lacking[]): number[] => [
-  ...new Set(lacking.flatMap(({ hardwareId }) => hardwareId ?? [])),
-];
+const itemKey = (item: { hardwareId?: number; leatherId?: number }): string =>
+  item.leatherId === undefined ? `hardware ${item.hardwareId}` : `leather ${item.leatherId}`;
 
-/** How many of some hardware a job asks for itself. */
-function neededBy(jobs: readonly JobRow[]) {
-  const byJob = new Map(
-    jobs.map(({ id, estimate }) => [id, (JSON.parse(estimate) as JobEstimate).hardware]),
+const keyOf = (jobId: number, item: Item): string => `${jobId} ${itemKey(item)}`;
+
+/** What each job holds and has taken of each thing. */
+function hadBy(holdings: readonly Holding[]): Map<string, number> {
+  return new Map(
+    holdings.map(({ job_id, hardware_id, leather_id, held, taken }) => {
+      const item =
+        leather_id === null ? { hardwareId: hardware_id ?? 0 } : { leatherId: leather_id };
+      return [keyOf(job_id, item), held + Math.max(0, taken)];
+    }),
   );
-  return (which: { jobId: number; hardwareId: number }): number =>
-    (byJob.get(which.jobId) ?? [])
-      .filter(({ hardwareId }) => hardwareId === which.hardwareId)
-      .reduce((sum, { quantity }) => sum + quantity, 0);
 }
 
-/** What a job needs beyond all that was ever held for it. */
-function lackingOf(job: JobRow, held: readonly HeldRow[]): Lacking[] {
-  const { leatherId, leatherAreaMm2, hardware } = JSON.parse(job.estimate) as JobEstimate;
-  const needs: Omit<Lacking, 'day' | 'paper' | 'jobId'>[] = [
+/** What a job needs by its estimate, each thing once. */
+function linesOf({ estimate }: JobRow): (Item & { quantity: number })[] {
+  const { leatherId, leatherAreaMm2, hardware } = JSON.parse(estimate) as JobEstimate;
+  const sums = new Map<number, number>();
+  for (const { hardwareId, quantity } of hardware)
+    sums.set(hardwareId, (sums.get(hardwareId) ?? 0) + quantity);
+  return [
     { leatherId, quantity: scaled(new Decimal(leatherAreaMm2), 3) },
-    ...hardware,
+    ...[...sums].map(([hardwareId, quantity]) => ({ hardwareId, quantity })),
   ];
-  return needs.flatMap((need) => {
-    const quantity = need.quantity - sumOf(held, { ...need, jobId: job.id }, (row) => row.quantity);
-    const paper = `${job.number} ${job.title}`;
-    return quantity > 0 ? [{ ...need, quantity, day: job.promised_on, paper, jobId: job.id }] : [];
+}
+
+function lackingOf(
+  { id: jobId, number, title, promised_on: day }: JobRow,
+  lines: ReturnType<typeof linesOf>,
+  has: ReadonlyMap<string, number>,
+): Owed[] {
+  return lines.flatMap((line) => {
+    const quantity = line.quantity - (has.get(keyOf(jobId, line)) ?? 0);
+    return quantity > 0 ? [{ ...line, quantity, day, paper: `${number} ${title}`, jobId }] : [];
   });
 }
 
-type Keyed = { job_id: number; hardware_id: number | null; leather_id: number | null };
-type Which = { jobId: number; hardwareId?: number; leatherId?: number };
-
-function sumOf<Row extends Keyed>(
-  rows: readonly Row[],
-  { jobId, hardwareId, leatherId }: Which,
-  value: (row: Row) => number,
-): number {
-  return rows
-    .filter(
-      (row) =>
-        row.job_id === jobId &&
-        row.hardware_id === (hardwareId ?? null) &&
-        row.leather_id === (leatherId ?? null),
-    )
-    .reduce((sum, row) => sum + value(row), 0);
-}
-
-/** Taken although it was not held: that is no longer owed. */
-function takenBeyond(which: Which, held: readonly HeldRow[], taken: readonly TakenRow[]): number {
-  const fromHeld = sumOf(held, which, (row) => row.quantity - row.open);
-  return Math.max(0, sumOf(taken, which, (row) => row.taken) - fromHeld);
-}
-
-async function takenBy(
-  em: EntityManager,
-  lacking: readonly Lacking[],
-  standInIds: readonly number[],
-): Promise<TakenRow[]> {
-  const list = (values: (number | undefined)[]) =>
-    JSON.stringify([...new Set(values.filter((value) => value !== undefined))]);
-  const jobs = list(lacking.map(({ jobId }) => jobId));
-  const ofHardware = await em.execute<TakenRow[]>(
-    `SELECT job_id, hardware_id, NULL AS leather_id, -SUM(quantity) AS taken FROM stock_movement
-    WHERE hardware_id IN (SELECT value FROM json_each(?)) AND job_id IN (SELECT value FROM json_each(?))
-    GROUP BY job_id, hardware_id`,
-    [list([...hardwareOf(lacking), ...standInIds]), jobs],
-  );
-  const ofLeather = await em.execute<TakenRow[]>(
-    `SELECT m.job_id, NULL AS hardware_id, l.leather_id, -SUM(m.quantity) AS taken
-    FROM lot l JOIN stock_movement m ON m.lot_id = l.id
-    WHERE l.leather_id IN (SELECT value FROM json_each(?)) AND m.job_id IN (SELECT value FROM json_each(?))
-    GROUP BY m.job_id, l.leather_id`,
-    [list(lacking.map(({ leatherId }) => leatherId)), jobs],
-  );
-  return [...ofHardware, ...ofLeather];
+/** Who is promised last goes without what was held and is not there. */
+function missingOf(broken: readonly BrokenRow[], jobs: readonly JobRow[]): Owed[] {
+  return broken.flatMap(({ hardware_id, leather_id, missing, holders }) => {
+    const item = leather_id === null ? { hardwareId: hardware_id ?? 0 } : { leatherId: leather_id };
+    let left = missing;
+    return (JSON.parse(holders) as [number, number][]).flatMap(([jobId, held]): Owed[] => {
+      const job = jobs.find(({ id }) => id === jobId);
+      const quantity = Math.min(left, held);
+      left -= quantity;
+      if (job === undefined || quantity === 0) return [];
+      const paper = `${job.number} ${job.title}`;
+      return [{ ...item, quantity, day: job.promised_on, paper, jobId }];
+    });
+  });
 }

@@ -11,7 +11,8 @@ import {
 } from '@hidewright/domain';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { Work } from '../../work.ts';
-import { readOwedToJobs, type OwedToJobs } from '../check/owed-to-jobs.ts';
+import { readOwedByStart } from '../check/owed-by-start.ts';
+import type { OwedToJobs } from '../check/owed-to-jobs.ts';
 import { readItemSources, type ItemSource } from './item-sources.ts';
 import { readOpenLines, type OpenLines } from './open-lines.ts';
 import { readOrderedItems, type ItemRow } from './ordered-items.ts';
@@ -55,7 +56,8 @@ interface Known {
 }
 
 /** What should be ordered of everything that is bought, in as many questions to the database whatever there is. */
-export async function suggestOrders({ em, today }: Work): Promise<Suggestions> {
+export async function suggestOrders(work: Work): Promise<Suggestions> {
+  const { em, today } = work;
   const rows = await readOrderedItems(em);
   const known: Known = {
     workshop: await em.findOneOrFail(Workshop, 1),
@@ -63,7 +65,7 @@ export async function suggestOrders({ em, today }: Work): Promise<Suggestions> {
     sourceOf: await readItemSources(em, today),
     used: await readUsedByWeek(em, today),
     openLines: await readOpenLines(em, today),
-    owed: await readOwedToJobs(em),
+    owed: (await readOwedByStart(work)).owed,
   };
   const items = rows.map((row) => suggestFor(row, known));
   return { items, workshop: known.workshop, today };

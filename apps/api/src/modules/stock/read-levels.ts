@@ -4,15 +4,13 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
 import { readOutAt } from './out-at.ts';
-import { readStandingsAt } from './read-standings-at.ts';
-import { readStandings } from './read-standings.ts';
 import type { Standings } from './standings.ts';
 
 interface Asked {
   /** The day whose end is meant. */
   on: string;
-  /** The instant at which the day was over in the shop; null for today, which is still going on. */
-  over: string | null;
+  /** How all stood then. */
+  standings: Standings;
   hardwareId?: number | undefined;
   leatherId?: number | undefined;
 }
@@ -38,9 +36,7 @@ interface HardwareRow {
 
 /** What the ledger says was there at the end of a day, and what it was worth; the place of a lot is where it lies now. */
 export async function readLevels(em: EntityManager, asked: Asked): Promise<StockLevels> {
-  const { on, over } = asked;
-  const standings =
-    over === null ? await readStandings(em) : await readStandingsAt(em, { on, over });
+  const { on, standings } = asked;
   const lots = asked.hardwareId === undefined ? await readLotRows(em, asked) : [];
   const pieces = asked.leatherId === undefined ? await readHardwareRows(em, asked) : [];
   const out = asked.hardwareId === undefined ? await readOutAt(em, asked) : [];

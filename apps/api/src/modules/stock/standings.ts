@@ -17,28 +17,39 @@ export interface StandingRow {
   reserved: number;
   free: number;
   on_order: number;
-  promised: number;
+}
+
+/** What open jobs need of it and do not have, as the ledger counts. */
+export interface Promised {
+  hardware: (id: number) => readonly { quantity: number }[];
+  leather: (id: number) => readonly { quantity: number }[];
 }
 
 export function standingsOf(
   hardwareRows: readonly StandingRow[],
   leatherRows: readonly StandingRow[],
+  promised: Promised,
 ): Standings {
   const [hardware, leathers] = [byId(hardwareRows), byId(leatherRows)];
   return {
-    ofHardware: (id) => standingOf(hardware.get(id), String),
-    ofLeather: (id) => standingOf(leathers.get(id), (kept) => unscaled(kept, 3).toFixed()),
+    ofHardware: (id) => standingOf(hardware.get(id), promised.hardware(id), String),
+    ofLeather: (id) =>
+      standingOf(leathers.get(id), promised.leather(id), (kept) => unscaled(kept, 3).toFixed()),
   };
 }
 
 const byId = (rows: readonly StandingRow[]): Map<number, StandingRow> =>
   new Map(rows.map((row) => [row.id, row]));
 
-function standingOf(row: StandingRow | undefined, text: (kept: number) => string): Standing {
+function standingOf(
+  row: StandingRow | undefined,
+  promised: readonly { quantity: number }[],
+  text: (kept: number) => string,
+): Standing {
   return {
     reserved: text(row?.reserved ?? 0),
     free: text(row?.free ?? 0),
     onOrder: text(row?.on_order ?? 0),
-    promised: text(row?.promised ?? 0),
+    promised: text(promised.reduce((sum, { quantity }) => sum + quantity, 0)),
   };
 }

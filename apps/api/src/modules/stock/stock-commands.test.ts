@@ -11,6 +11,7 @@ import {
 } from '../../testing/stock-invariants.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 import { dayIn, endOfDay } from '../../day-in.ts';
+import { readOwedToJobs } from '../../flows/check/owed-to-jobs.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { readStandingsAt } from './read-standings-at.ts';
 import { readStandings } from './read-standings.ts';
@@ -254,15 +255,16 @@ async function endTheDay(): Promise<void> {
     hardware: ofHardware(ready.hardwareId),
   });
   const on = dayIn(timeZone, ready.shop.clock.now());
-  days.set(on, told(await readStandings(em)));
+  days.set(on, told(await readStandings(em, await readOwedToJobs(em))));
   ready.shop.clock.set(new Date(`${addDays(on, 1)}T09:00:00.000Z`));
   // Nobody has to sign in anew for it.
   await em.execute(`UPDATE web_session SET expires_at = '2027-12-01', created_at = ?`, [
     ready.shop.clock.now().toISOString(),
   ]);
   for (const [day, stood] of days) {
-    const over = endOfDay(timeZone, day).toISOString();
-    expect(told(await readStandingsAt(em, { on: day, over })), day).toEqual(stood);
+    const then = { on: day, over: endOfDay(timeZone, day).toISOString() };
+    const owed = await readOwedToJobs(em, then);
+    expect(told(await readStandingsAt(em, then, owed)), day).toEqual(stood);
   }
 }
 

@@ -4,15 +4,20 @@ import {
   readStockLevels,
   readStockLevelsFile,
   type QueryOf,
+  type StockLevels,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { endOfDay } from '../../day-in.ts';
+import { readOwedToJobs } from '../../flows/check/owed-to-jobs.ts';
 import { invalid } from '../../http/problem.ts';
 import { serve, serveFile } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { readMovements } from './read-ledger.ts';
 import { readLevels } from './read-levels.ts';
+import { readStandingsAt } from './read-standings-at.ts';
+import { readStandings } from './read-standings.ts';
+import type { Standings } from './standings.ts';
 import { levelsSheet, movementsSheet } from './stock-sheets.ts';
 
 const mostMovements = 20_000;
@@ -50,9 +55,17 @@ export function stockLevelRoutes(context: Context): Router {
 
 const seesValues = ({ actor }: Work): boolean => actor.role !== 'maker';
 
-async function levelsOn(work: Work, { on = work.today, ...item }: QueryOf<typeof readStockLevels>) {
+async function levelsOn(
+  work: Work,
+  { on = work.today, ...item }: QueryOf<typeof readStockLevels>,
+): Promise<StockLevels> {
   if (on > work.today) throw invalid([{ field: 'on', message: 'Choose today or an earlier day.' }]);
-  const { timeZone } = await work.em.findOneOrFail(Workshop, 1);
-  const over = on === work.today ? null : endOfDay(timeZone, on).toISOString();
-  return readLevels(work.em, { on, over, ...item });
+  return readLevels(work.em, { on, standings: await standingsOn(work, on), ...item });
+}
+
+async function standingsOn({ em, today }: Work, on: string): Promise<Standings> {
+  if (on === today) return readStandings(em, await readOwedToJobs(em));
+  const { timeZone } = await em.findOneOrFail(Workshop, 1);
+  const then = { on, over: endOfDay(timeZone, on).toISOString() };
+  return readStandingsAt(em, then, await readOwedToJobs(em, then));
 }

@@ -28,7 +28,8 @@ beforeAll(async () => {
   lotId = body.lots[0].id;
   at('2026-11-20');
   jobId = await writeBareJob(shop.context, 1);
-  const need = JSON.stringify({ hardware: [{ hardwareId, quantity: 900 }] });
+  const hardware900 = [{ hardwareId, quantity: 900 }];
+  const need = JSON.stringify({ leatherId, leatherAreaMm2: ft2(5), hardware: hardware900 });
   const connection = shop.context.orm.em.fork().getConnection();
   await connection.execute('PRAGMA foreign_keys = OFF');
   await connection.execute('UPDATE job SET estimate = ? WHERE id = ?', [need, jobId]);
