@@ -13,6 +13,7 @@ const toDo = z.object({
     'make',
     'check',
     'order',
+    'too little',
     'receive',
     'ship',
     'invoice',

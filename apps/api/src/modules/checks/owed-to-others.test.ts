@@ -1,5 +1,5 @@
 import { afterEach, beforeEach, expect, it } from 'vitest';
-import type { OrderSuggestion, RunsCheck, StockLevels } from '@hidewright/contract';
+import type { RunsCheck, StockLevels } from '@hidewright/contract';
 import {
   readyForTheBench,
   setBenchHours,
@@ -30,7 +30,7 @@ async function promised(): Promise<[string | undefined, string | undefined]> {
   const { hardwareId } = ready;
   const levels = await owner().get('/api/stock-levels').query({ hardwareId }).expect(200);
   const suggested = await owner().get('/api/order-suggestions?show=all').expect(200);
-  const items = (suggested.body as { items: OrderSuggestion[] }).items;
+  const items = (suggested.body as { items: { name: string; promised: string }[] }).items;
   return [
     (levels.body as StockLevels).hardware[0]?.standing.promised,
     items.find(({ name }) => name === 'Rivet 9 mm')?.promised,
@@ -67,6 +67,14 @@ it('what was held and is not there is owed to the job that goes without', async 
   const looked = { of: 'hardware', hardwareId: ready.hardwareId, counted: 150, reason: 'looked' };
   await maker().post('/api/adjustments').send(looked).expect(201);
   expect(await promised()).toEqual(['50', '50']);
+  const today = await maker().get('/api/today').expect(200);
+  expect(today.body.now).toContainEqual(
+    expect.objectContaining({
+      kind: 'too little',
+      detail: 'Rivet 9 mm: a count found less than is held for J-0001',
+      to: `/stockroom/hardware/${ready.hardwareId}`,
+    }),
+  );
   await awaitRivets(100, '2026-12-08');
   expect(await foundBy('2026-12-30')).toMatchObject({ free: '50', short: '50' });
 });

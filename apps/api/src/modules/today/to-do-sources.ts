@@ -39,6 +39,27 @@ export const sources: Source[] = [
     }),
   },
   {
+    roles: ['owner', 'maker'],
+    sql: `SELECT COALESCE(b.lot_id, b.hardware_id) AS id, CASE WHEN b.lot_id IS NULL THEN 'hardware' ELSE 'lots' END AS number,
+        COALESCE(l.tag || ' ' || leather.name, h.name) AS title, '' AS customer,
+        MIN(o.promised_on) AS day, group_concat(DISTINCT j.number) AS extra
+      FROM stock_balance b
+        JOIN reservation r ON r.lot_id IS b.lot_id AND r.hardware_id IS b.hardware_id AND r.open > 0
+        JOIN job j ON j.id = r.job_id JOIN customer_order o ON o.id = j.order_id
+        LEFT JOIN lot l ON l.id = b.lot_id LEFT JOIN leather ON leather.id = l.leather_id
+        LEFT JOIN hardware h ON h.id = b.hardware_id
+      WHERE b.reserved > b.on_hand GROUP BY b.id ORDER BY day, b.id LIMIT 4`,
+    say: (row, today) => ({
+      kind: 'too little',
+      title: 'Less there than is held',
+      detail: `${row.title}: a count found less than is held for ${(row.extra ?? '').split(',').join(' and ')}`,
+      when: by('promised for', row.day),
+      late: past(row.day, today),
+      action: 'Look',
+      to: `/stockroom/${row.number}/${row.id}`,
+    }),
+  },
+  {
     roles: ['maker'],
     sql: `SELECT j.id, j.number, o.title, c.name AS customer, o.promised_on AS day, j.state AS extra
       FROM job j JOIN customer_order o ON o.id = j.order_id JOIN customer c ON c.id = o.customer_id
