@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { drawnAreaMm2, soundSide, usualSide } from './drawn-side.ts';
+import { drawnAreaMm2, soundAreaMm2, soundSide, usualSide } from './drawn-side.ts';
 
 const square = [
   { x: 0, y: 0 },
@@ -44,4 +44,27 @@ it('starts from a sound side of the area given', () => {
       expect(soundSide({ outline, flaws: [] }).outline).toEqual(outline);
     }),
   );
+});
+
+describe('what is sound of a drawn side', () => {
+  const box = (x: number, y: number, width: number, height: number) => [
+    { x, y },
+    { x: x + width, y },
+    { x: x + width, y: y + height },
+    { x, y: y + height },
+  ];
+  const outline = box(0, 0, 1000, 1000);
+
+  it('loses a flaw once, however often it is drawn and whichever way round', () => {
+    const flaw = box(100, 100, 300, 400);
+    const flaws = [flaw, [...flaw].reverse(), box(200, 100, 200, 400)];
+    expect(soundAreaMm2({ outline, flaws })).toBeCloseTo(880_000, 3);
+    expect(soundAreaMm2({ outline: [...outline].reverse(), flaws })).toBeCloseTo(880_000, 3);
+  });
+
+  it('loses nothing to what lies over the edge', () => {
+    expect(soundAreaMm2({ outline, flaws: [box(900, 0, 300, 1000)] })).toBeCloseTo(900_000, 3);
+    expect(soundAreaMm2({ outline, flaws: [box(1100, 0, 300, 300)] })).toBeCloseTo(1_000_000, 3);
+    expect(soundAreaMm2({ outline, flaws: [] })).toBe(1_000_000);
+  });
 });

@@ -1,4 +1,5 @@
 import { InvalidInput } from '../errors/domain-error.ts';
+import { areaWithout } from '../outline/clip.ts';
 import type { Point } from '../outline/outline.ts';
 import { findCrossing } from '../outline/crossing.ts';
 import { type Ring, ringArea, ringBounds, toMicrometre, withoutRepeats } from '../outline/ring.ts';
@@ -62,6 +63,10 @@ function soundCurve(ring: Ring, field: string, name: string, most: number): Poin
 
 /** The area inside a drawn edge in mm², flaws included. */
 export const drawnAreaMm2 = (outline: Ring): number => Math.abs(ringArea(outline));
+
+/** The area inside a drawn edge in mm² less its flaws, which may lie over each other and over the edge. */
+export const soundAreaMm2 = ({ outline, flaws }: DrawnSide): number =>
+  flaws.length === 0 ? drawnAreaMm2(outline) : areaWithout(outline, flaws);
 
 /**
  * A side as one usually looks, spine along the top (y runs down), neck to the right: something to

@@ -1,6 +1,6 @@
 import { Clipper, EndType, FillRule, JoinType, type Path64, type Paths64 } from 'clipper2-ts';
 import type { Point } from './outline.ts';
-import type { Ring } from './ring.ts';
+import { turnedRing, type Ring } from './ring.ts';
 
 /** Whole numbers that clipping works in, per mm: a ten-millionth of a millimetre. */
 const perMm = 1e7;
@@ -38,4 +38,14 @@ export function grown(rings: readonly Ring[], mm: number, withinMm = arcMm): Poi
 export function commonArea(a: Ring, b: Ring): number {
   const common = Clipper.intersect([toPath(a)], [toPath(b)], FillRule.Positive);
   return common.reduce((sum, path) => sum + Clipper.area(path), 0) / (perMm * perMm);
+}
+
+/** Area in mm² of a simple polygon without whatever others cover of it, whichever way round they all run. */
+export function areaWithout(ring: Ring, others: readonly Ring[]): number {
+  const left = Clipper.difference(
+    [toPath(ring)],
+    others.map((each) => toPath(turnedRing(each, 'counter-clockwise'))),
+    FillRule.NonZero,
+  );
+  return Math.abs(left.reduce((sum, path) => sum + Clipper.area(path), 0)) / (perMm * perMm);
 }

@@ -7,7 +7,7 @@ import {
   panelArea,
   type PiecesOfLot,
   piecesFromLot,
-  usableOf,
+  usableArea,
 } from './pieces-from-lot.ts';
 
 export interface LotTaken {
@@ -55,7 +55,7 @@ export function drawLeather(
     return { lot, from: piecesFromLot(lot, need.cut, laid, panel) };
   });
   const offers = offered.map(toOffer);
-  const fromLots = Math.min(when.pieces, notOwed(leather, need));
+  const fromLots = Math.min(when.pieces, notOwed(leather, need, offered));
   const chosen = chooseLots(offers, fromLots, need.likeShade);
   const takes = chosen.flatMap(({ lotId, pieces }) => {
     const each = offered.find(({ lot }) => lot.lotId === lotId);
@@ -87,12 +87,26 @@ const toOffer = ({ lot: { lotId, shade, receivedOn }, from: { pieces } }: Offere
 const noneFits = ({ lot, from }: Offered): boolean =>
   from.by === 'panels' && from.pieces === 0 && lot.freeArea > 0;
 
-/** Pieces that may be cut now without taking what jobs taken on before still need. */
-function notOwed({ lots, owed }: LeatherStock, { cut }: LeatherNeed): number {
-  if (owed === 0) return Infinity;
-  const panels = Math.floor((usableOf(lots) - owed) / panelArea(cut));
-  return Math.max(0, panels) * cut.pieces;
+/**
+ * Pieces that may be cut now without taking what jobs taken on before still need. Nobody knows yet which lots those
+ * will be cut from: they are given the lots of which this run has the least.
+ */
+function notOwed({ owed }: LeatherStock, { cut, laid }: LeatherNeed, offered: Offered[]): number {
+  let left = owed;
+  const panel = panelArea(cut);
+  return [...offered]
+    .sort((a, b) => yieldOf(a) - yieldOf(b))
+    .reduce((sum, { lot, from }) => {
+      const gone = Math.min(left, usableArea(lot));
+      left -= gone;
+      if (gone === 0) return sum + from.pieces;
+      const less = { ...lot, freeArea: lot.freeArea - gone };
+      return sum + piecesFromLot(less, cut, laid.get(lot.lotId) ?? null, panel).pieces;
+    }, 0);
 }
+
+/** Pieces for each part of it that can be cut; what cannot be cut at all is given first. */
+const yieldOf = ({ lot, from }: Offered): number => from.pieces / Math.max(1, usableArea(lot));
 
 function takeFrom({ lot, from }: Offered, pieces: number): LotTaken {
   const units = Math.ceil(pieces / from.perUnit);

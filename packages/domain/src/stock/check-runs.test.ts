@@ -127,6 +127,26 @@ describe('Can we make it?', () => {
     );
   });
 
+  it('leaves other jobs their leather where this run has the least of it, and keeps its layouts', () => {
+    // Seventeen panels are usable, of which a layout makes 230 pieces in place of 204; one panel is owed.
+    const drawn = lot(1, 20, { usablePercent: 85 });
+    const owing = (lots: RackLot[]) => shop({ leathers: [{ ...russet(lots), owed: 120_000_000 }] });
+    const asked = run(218);
+    const leather = { ...asked.leather, laid: new Map([[1, 230]]) };
+    const [alone] = checkRuns(owing([drawn]), [{ ...asked, leather }]);
+    expect(alone!.leather).toMatchObject({
+      piecesShort: 0,
+      takes: [{ pieces: 218, by: 'layout' }],
+    });
+    // A lot of which no panel can be cut for this run is the others' first.
+    const crumbs = lot(2, 1.9, { usablePercent: 52 });
+    const whole = { ...asked, pieces: 230, leather };
+    const [beside] = checkRuns(owing([drawn, crumbs]), [whole]);
+    expect(beside!.leather.piecesShort).toBeLessThanOrEqual(1);
+    const [short] = checkRuns(owing([drawn]), [whole]);
+    expect(short!.leather.piecesShort).toBe(12);
+  });
+
   it('names what is short, what mends it, and by when the run can be had', () => {
     const poor = shop({ items: [rivets(40)], tools: [] });
     const [facts] = checkRuns(poor, [run(150, '2026-12-03')]);

@@ -47,7 +47,24 @@ describe('piecesFromLot', () => {
     const bundle = { ...side, panel: { widthMm: 400, heightMm: 300 }, freeArea: mm2(1_000_000) };
     expect(piecesFromLot(bundle, cut)).toMatchObject({ pieces: 8 * 12, by: 'panels' });
     const double = { ...bundle, panel: { widthMm: 410, heightMm: 610 } };
-    expect(piecesFromLot(double, cut)).toMatchObject({ pieces: 3 * 24, perUnit: 24 });
+    // 2,000,000 mm² typed for eight of 250,100.
+    expect(piecesFromLot(double, cut)).toMatchObject({ pieces: 4 * 24, perUnit: 24 });
+  });
+
+  it('goes by how many panels somebody counted, whatever area was typed for all of them', () => {
+    const panel = { widthMm: 279.4, heightMm: 330.2 };
+    const eleven = { pieces: 21, areaMm2: '92257.88', sides: panel };
+    const typed = (footage: number, panels: number): LotToCut => {
+      const area = mm2(Math.round(footage * 92_903.04));
+      return { ...side, freeArea: area, measuredArea: area, panel, panels };
+    };
+    // Ten panels of 9.9306 ft² together: 9.9, 9.93 or 10.5 was written down.
+    for (const footage of [9.9, 9.93, 10.5])
+      expect(piecesFromLot(typed(footage, 10), eleven).pieces).toBe(210);
+    const used = typed(9.93, 10);
+    const three = areaForPieces(used, piecesFromLot(used, eleven), 63);
+    expect(piecesFromLot({ ...used, freeArea: used.freeArea - three }, eleven).pieces).toBe(147);
+    expect(usableArea(used)).toBe(used.freeArea);
   });
 
   it('cuts nothing from panels, strips or offcuts that are too narrow, whatever their area', () => {

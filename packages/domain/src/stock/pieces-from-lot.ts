@@ -24,6 +24,8 @@ export interface LotToCut {
   panel: { widthMm: number; heightMm: number } | null;
   /** how many offcuts of at most those sides it is: one may have a corner gone; absent of ready panels and strips */
   offcuts?: number;
+  /** how many ready panels or strips of those sides came, where somebody counted them */
+  panels?: number;
   /** area inside its drawn edge less its flaws; null where it is not drawn */
   drawnArea: number | null;
 }
@@ -59,11 +61,12 @@ export function piecesFromLot(
   if (laid !== null) return byLayout(lot, laid);
   if (lot.panel === null || cut.sides === null) return byArea(lot, cut.pieces, panel);
   const within = panelsWithin(lot.panel, cut.sides);
-  const most = Math.min(within * (lot.offcuts ?? 1), Math.floor(lot.measuredArea / panel));
+  const whole = lot.offcuts === undefined ? within : Math.floor(lot.measuredArea / panel);
+  const most = Math.min(within * (lot.offcuts ?? 1), whole);
   if (most === 0)
     return { pieces: 0, by: 'panels', perUnit: cut.pieces, units: { count: 1, area: panel } };
   return lot.offcuts === undefined
-    ? byPanels(lot, lot.panel, within * cut.pieces)
+    ? byPanels(lot, panelsOf(lot, lot.panel), within * cut.pieces)
     : byOffcuts(lot, most, cut.pieces);
 }
 
@@ -83,14 +86,25 @@ function byLayout({ freeArea, measuredArea }: LotToCut, laid: number): PiecesOfL
   };
 }
 
+/** Each panel of the bundle goes with its share of the area that somebody measured, or added up, for all of it. */
 function byPanels(
-  { freeArea }: LotToCut,
-  { widthMm, heightMm }: { widthMm: number; heightMm: number },
+  { freeArea, measuredArea }: LotToCut,
+  count: number,
   perUnit: number,
 ): PiecesOfLot {
-  const area = new Exact(widthMm).times(heightMm).times(1000).ceil().toNumber();
-  const pieces = Math.floor(freeArea / area) * perUnit;
-  return { pieces, by: 'panels', perUnit, units: { count: 1, area } };
+  const left = Math.min(count, divided(freeArea + count, count, measuredArea, 'down'));
+  const units = { count, area: measuredArea };
+  return { pieces: left * perUnit, by: 'panels', perUnit, units };
+}
+
+/** Where nobody counted them, the area says how many they are: a hundredth short of one more is a rounded figure. */
+function panelsOf(
+  { panels, measuredArea }: LotToCut,
+  { widthMm, heightMm }: NonNullable<LotToCut['panel']>,
+): number {
+  if (panels !== undefined && panels > 1) return panels;
+  const each = new Exact(widthMm).times(heightMm).times(1000);
+  return Math.max(1, new Exact(measuredArea).div(each).plus('0.01').floor().toNumber());
 }
 
 /**
@@ -112,9 +126,10 @@ function byArea(lot: LotToCut, perUnit: number, area: number): PiecesOfLot {
   return { pieces, by: 'area', perUnit, units: { count: 1, area } };
 }
 
-/** What can still be cut of a lot, where no layout says it: its usable share less what is gone. */
+/** What can still be cut of a lot, where no layout says it: its usable share less what is gone. A ready panel is all usable. */
 export function usableArea(lot: LotToCut): number {
-  const { freeArea, measuredArea, usablePercent, drawnArea } = lot;
+  const { freeArea, measuredArea, usablePercent, drawnArea, panel, offcuts } = lot;
+  if (panel !== null && offcuts === undefined) return freeArea;
   const share = divided(measuredArea, Math.round(usablePercent * 10_000), 1_000_000, 'down');
   const usable = Math.min(share, drawnArea ?? share);
   return Math.max(0, Math.min(usable - (measuredArea - freeArea), freeArea));

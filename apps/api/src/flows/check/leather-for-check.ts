@@ -1,5 +1,4 @@
-import { drawnAreaMm2, type LeatherStock } from '@hidewright/domain';
-import type { LotDrawing } from '@hidewright/contract';
+import { soundAreaMm2, type DrawnSide, type LeatherStock } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
@@ -66,7 +65,7 @@ export function toRackLot(row: LotRow): LeatherStock['lots'][number] {
     measuredArea: row.measured_area_mm2,
     usablePercent: row.usable_percent / 10_000,
     panel: panelOf(row),
-    ...(row.form === 'offcut' && { offcuts: row.pieces }),
+    ...(row.form === 'offcut' ? { offcuts: row.pieces } : { panels: row.pieces }),
     drawnArea: drawnArea(row),
   };
 }
@@ -84,10 +83,6 @@ function panelOf({ form, width_mm, height_mm }: LotRow) {
 
 function drawnArea({ outline, flaws }: LotRow): number | null {
   if (outline === null) return null;
-  const gone = (JSON.parse(flaws) as LotDrawing['flaws']).reduce(
-    (sum, flaw) => sum + drawnAreaMm2(flaw),
-    0,
-  );
-  const left = drawnAreaMm2(JSON.parse(outline) as NonNullable<LotDrawing['outline']>) - gone;
-  return Math.floor(Math.max(0, left) * 1000);
+  const drawn = { outline: JSON.parse(outline), flaws: JSON.parse(flaws) } as DrawnSide;
+  return Math.floor(soundAreaMm2(drawn) * 1000);
 }
