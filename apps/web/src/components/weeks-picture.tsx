@@ -1,13 +1,16 @@
 import { addDays, daysBetween } from '@hidewright/domain';
 import { dayText } from '../lib/formatting.ts';
 import { useWorkshop } from '../lib/workshop.tsx';
-import { weekSteps, type ComingOf } from './week-steps.ts';
+import { heldOf, spokenWeeks, weekSteps, type ComingOf } from './week-steps.ts';
 
 const [wide, high] = [600, 120];
 /** Two weeks at least, so that a single day is not stretched over the page. */
 const fewestDays = 14;
 
-/** What is free of an item over the coming weeks as a stepped line; below the bar it does not suffice. */
+/**
+ * What there is of an item over the coming weeks: the stepped line is what is free, the band above it is held for jobs,
+ * and a thick rise is what comes. Below the bar it does not suffice.
+ */
 export function WeeksPicture({
   item,
   say,
@@ -26,14 +29,20 @@ export function WeeksPicture({
     Math.max(...steps.map(({ left }) => left)),
     Math.min(...steps.map(({ left }) => left)),
   ];
-  const [top, bottom] = [Math.max(0, most, mark?.at ?? 0), Math.min(0, least)];
+  const held = heldOf(item);
+  const [top, bottom] = [Math.max(0, most + held, mark?.at ?? 0), Math.min(0, least)];
   const y = (left: number) => 8 + ((top - left) / (top - bottom || 1)) * (high - 16);
   const x = (after: number) => (after / days) * wide;
-  const path = steps
-    .map(({ after, left }, at) => `${at === 0 ? 'M 0' : `H ${x(after)} V`} ${y(left)}`)
+  const stepped = (above: number) =>
+    steps
+      .map(({ after, left }, at) => `${at === 0 ? 'M 0' : `H ${x(after)} V`} ${y(left + above)}`)
+      .join(' ');
+  const back = steps
+    .map(({ left }, at) => `V ${y(left)} H ${x(steps[at]?.after ?? 0)}`)
+    .reverse()
     .join(' ');
   const out = item.runsOutOn === null ? null : x(daysBetween(today, item.runsOutOn));
-  const spoken = `${item.name}: ${say(String(steps[0]?.left ?? 0))} free today${item.runsOutOn === null ? '' : `, too little from ${dayText(item.runsOutOn, today)}`}`;
+  const spoken = spokenWeeks(item, { say, dayText: (day) => dayText(day, today) });
   return (
     <figure className="my-3">
       <svg
@@ -76,8 +85,24 @@ export function WeeksPicture({
             vectorEffect="non-scaling-stroke"
           />
         )}
+        {held > 0 && <path d={`${stepped(held)} H ${wide} ${back} Z`} className="fill-brass/30" />}
+        {steps.map(
+          ({ after, left, comes }) =>
+            comes > 0 && (
+              <line
+                key={after}
+                x1={x(after)}
+                x2={x(after)}
+                y1={y(left)}
+                y2={y(left - comes)}
+                strokeWidth="8"
+                className="stroke-verdigris"
+                vectorEffect="non-scaling-stroke"
+              />
+            ),
+        )}
         <path
-          d={`${path} H ${wide}`}
+          d={`${stepped(0)} H ${wide}`}
           fill="none"
           strokeWidth="3"
           className="stroke-verdigris"
@@ -86,6 +111,10 @@ export function WeeksPicture({
       </svg>
       <figcaption className="mt-1 flex flex-wrap justify-between gap-x-4 text-sm text-ink-soft">
         <span>{dayText(today, today)}</span>
+        <span>
+          line: free{held > 0 && `; band: ${say(String(held))} held for jobs`}
+          {steps.some(({ comes }) => comes > 0) && '; thick: comes'}
+        </span>
         {mark !== undefined && <span className="text-brass">{`dotted: ${mark.word}`}</span>}
         {item.runsOutOn !== null && (
           <span className="text-oxblood">{`too little from ${dayText(item.runsOutOn, today)}`}</span>

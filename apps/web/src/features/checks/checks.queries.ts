@@ -1,6 +1,7 @@
 import { checkQuote, listPatterns, listQuotes, readPattern, readQuote } from '@hidewright/contract';
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 interface Asked {
   option?: string | undefined;
@@ -22,7 +23,7 @@ export function checkQuery(quoteId: number, asked: Asked = {}) {
 export function openQuotesQuery() {
   return queryOptions({
     queryKey: ['quotes', 'open'],
-    queryFn: ({ signal }) => call(listQuotes, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listQuotes, { query: paging, signal })),
     select: ({ items }) =>
       (['agreed', 'sent', 'draft'] as const).flatMap((state) =>
         items
@@ -35,7 +36,7 @@ export function openQuotesQuery() {
 export function patternChoicesQuery() {
   return queryOptions({
     queryKey: ['patterns', 'choices'],
-    queryFn: ({ signal }) => call(listPatterns, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listPatterns, { query: paging, signal })),
     select: ({ items }) =>
       items.filter(({ active }) => active).map(({ id, name }) => ({ value: id, label: name })),
   });

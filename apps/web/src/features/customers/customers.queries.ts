@@ -1,12 +1,13 @@
 import { listCustomers, readCustomer } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 /** The customers, newest first; one page holds what a small shop has. */
 export function customersQuery() {
   return queryOptions({
     queryKey: ['customers'],
-    queryFn: ({ signal }) => call(listCustomers, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listCustomers, { query: paging, signal })),
   });
 }
 

@@ -1,12 +1,14 @@
 import { compareJob, listJobs, readBenchHours, readJob, readVariances } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 /** The jobs on which there is still something to do. */
 export function openJobsQuery() {
   return queryOptions({
     queryKey: ['jobs', 'open'],
-    queryFn: ({ signal }) => call(listJobs, { query: { open: 'true', limit: 200 }, signal }),
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listJobs, { query: { open: 'true', ...paging }, signal })),
   });
 }
 

@@ -14,7 +14,7 @@ import { everyPage } from '../../lib/every-page.ts';
 export function patternsQuery() {
   return queryOptions({
     queryKey: ['patterns'],
-    queryFn: ({ signal }) => call(listPatterns, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listPatterns, { query: paging, signal })),
   });
 }
 

@@ -72,7 +72,8 @@ export function purchaseOrderQuery(id: number) {
 export function receiptsQuery(purchaseOrderId: number) {
   return queryOptions({
     queryKey: ['purchase-orders', purchaseOrderId, 'receipts'],
-    queryFn: ({ signal }) => call(listReceipts, { query: { purchaseOrderId, limit: 200 }, signal }),
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listReceipts, { query: { purchaseOrderId, ...paging }, signal })),
   });
 }
 

@@ -8,6 +8,7 @@ import {
 } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 interface Wanted {
   state?: QuoteState | undefined;
@@ -56,7 +57,7 @@ export function runBasisQuery(patternId: number, customerId?: number) {
 export function patternChoicesQuery() {
   return queryOptions({
     queryKey: ['patterns', 'choices'],
-    queryFn: ({ signal }) => call(listPatterns, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listPatterns, { query: paging, signal })),
     select: ({ items }) =>
       items.filter((pattern) => pattern.active).map(({ id, name }) => ({ value: id, label: name })),
   });

@@ -6,6 +6,7 @@ import {
 } from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 /** One lot, or one hardware. */
 export type Item = { lotId: number } | { hardwareId: number };
@@ -39,6 +40,7 @@ export function movementsQuery(item: Asked) {
 export function heldQuery(item: Item) {
   return queryOptions({
     queryKey: ['stock', 'held', item],
-    queryFn: ({ signal }) => call(listReservations, { query: { ...item, limit: 200 }, signal }),
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listReservations, { query: { ...item, ...paging }, signal })),
   });
 }

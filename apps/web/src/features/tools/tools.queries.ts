@@ -9,12 +9,14 @@ import {
 } from '@hidewright/contract';
 import { infiniteQueryOptions, keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
+import { everyPage } from '../../lib/every-page.ts';
 
 /** Cutting dies and stamp plates, of one pattern or all of them; one page holds what a small shop's rack does. */
 export function toolsQuery(patternId?: number) {
   return queryOptions({
     queryKey: ['tools', 'list', patternId ?? 'all'],
-    queryFn: ({ signal }) => call(listTools, { query: { limit: 200, patternId }, signal }),
+    queryFn: ({ signal }) =>
+      everyPage((paging) => call(listTools, { query: { patternId, ...paging }, signal })),
   });
 }
 
@@ -44,7 +46,7 @@ export function impressionsQuery(id: number) {
 export function patternChoicesQuery() {
   return queryOptions({
     queryKey: ['tools', 'pattern-choices'],
-    queryFn: ({ signal }) => call(listPatterns, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listPatterns, { query: paging, signal })),
     select: ({ items }) => items.map(({ id, name }) => ({ value: id, label: name })),
   });
 }
@@ -53,7 +55,7 @@ export function patternChoicesQuery() {
 export function customerChoicesQuery() {
   return queryOptions({
     queryKey: ['tools', 'customer-choices'],
-    queryFn: ({ signal }) => call(listCustomers, { query: { limit: 200 }, signal }),
+    queryFn: ({ signal }) => everyPage((paging) => call(listCustomers, { query: paging, signal })),
     select: ({ items }) => items.map(({ id, name }) => ({ value: id, label: name })),
   });
 }
