@@ -59,7 +59,7 @@ export async function moveHeld(
 }
 
 /** What is on hand of an item, as a row of its own; a new one where nothing ever was. */
-export async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalance> {
+async function balanceOf(em: EntityManager, item: StockItem): Promise<StockBalance> {
   await refuseKit(em, item);
   const found = await em.findOne(StockBalance, keysOf(item));
   return found ?? em.create(StockBalance, { ...keysOf(item), onHand: 0, reserved: 0 });
