@@ -13,8 +13,10 @@ import {
   page,
   pageQuery,
   positiveCount,
+  unitPrice,
   version,
 } from './fields.ts';
+import { invoice } from './invoices.ts';
 
 /** What may become of a piece that leaves the shelf. */
 const waysOut = ['sold', 'given', 'spoiled'] as const;
@@ -46,12 +48,14 @@ export const finishedMovement = z
     id,
     at: z.string(),
     day,
-    kind: z.enum(['made', ...waysOut, 'count']),
+    kind: z.enum(['made', ...waysOut, 'count', 'put back']),
     /** Signed: in is positive. */
     quantity: z.int(),
     value: confidential(z.string()),
     jobId: id.nullable(),
     jobNumber: z.string().nullable(),
+    /** The invoice that sells them; null where there is none, or its draft was discarded. */
+    invoice: confidential(z.object({ id, number: z.string().nullable() }).nullable()),
     reason: z.string(),
     actorName: z.string(),
   })
@@ -129,6 +133,29 @@ export const takeFinished = endpoint({
     reason: line(200, 'Say to whom or why, in a few words.'),
   }),
   reply: finishedPiece,
+});
+
+export const sellFinished = endpoint({
+  method: 'POST',
+  path: '/finished-pieces/{id}/sales',
+  summary:
+    'Sell pieces from the shelf to a customer: drafts the invoice, or adds a line to a draft from the shelf',
+  access: ['owner'],
+  creates: true,
+  params: idParams,
+  body: z.strictObject({
+    customerId: choice('Choose the customer.'),
+    quantity: positiveCount,
+    unitPrice: unitPrice.refine(
+      (text) => Number(text) !== 0,
+      'Enter a price above zero, or take them from the shelf as given away.',
+    ),
+    /** Null says that no tax applies; it must be said. */
+    taxRateId: z.int('Choose a tax rate, or say that no tax applies.').positive().nullable(),
+    /** The draft that the line goes to; null for a new one. */
+    draftId: id.nullable().default(null),
+  }),
+  reply: invoice,
 });
 
 export const countFinished = endpoint({

@@ -27,8 +27,9 @@ const head = {
   state: invoiceState,
   customerId: id,
   customerName: z.string(),
-  orderId: id,
-  orderNumber: z.string(),
+  /** Null where the pieces were sold from the shelf, without an order. */
+  orderId: id.nullable(),
+  orderNumber: z.string().nullable(),
   title: z.string(),
   issuedOn: z.string().nullable(),
   dueOn: z.string().nullable(),
@@ -56,6 +57,8 @@ export const invoiceLine = z
     taxPercent: z.string().nullable(),
     taxRateId: id.nullable(),
     taxName: z.string().nullable(),
+    /** What of the shelf it sells; null on the invoice of an order. */
+    finishedPieceId: id.nullable(),
   })
   .meta({ id: 'InvoiceLine' });
 export type InvoiceLine = z.infer<typeof invoiceLine>;
@@ -82,7 +85,7 @@ export type Payment = z.infer<typeof payment>;
 export const invoice = z
   .object({
     ...head,
-    orderState: z.string(),
+    orderState: z.string().nullable(),
     currency: z.string(),
     /** As they stood when the invoice was issued; as they stand now on a draft. */
     billedTo: z.object({ name: z.string(), contactName: z.string(), address: z.string() }),
@@ -100,7 +103,12 @@ export const listInvoices = endpoint({
   path: '/invoices',
   summary: 'Invoices, newest first',
   access: bookkeepers,
-  query: pageQuery.extend({ state: invoiceState.optional() }),
+  query: pageQuery.extend({
+    state: invoiceState.optional(),
+    customerId: z.coerce.number().int().positive().optional(),
+    /** Those of orders, or those of pieces that lay on the shelf. */
+    of: z.enum(['orders', 'shelf']).optional(),
+  }),
   reply: page(invoiceSummary),
 });
 
@@ -178,10 +186,21 @@ export const changeInvoice = endpoint({
 export const discardInvoice = endpoint({
   method: 'DELETE',
   path: '/invoices/{id}',
-  summary: 'Discard a draft; its order can be invoiced again',
+  summary:
+    'Discard a draft; its order can be invoiced again, and what it sold lies on the shelf again',
   access: bookkeepers,
   params: idParams,
   reply: z.object({ discarded: z.literal(true) }),
+});
+
+export const removeInvoiceLine = endpoint({
+  method: 'DELETE',
+  path: '/invoices/{id}/lines/{position}',
+  summary: 'Take what was sold from the shelf off a draft; it lies there again',
+  access: bookkeepers,
+  edits: true,
+  params: idParams.extend({ position: z.coerce.number().int().positive() }),
+  reply: invoice,
 });
 
 export const issueInvoice = endpoint({

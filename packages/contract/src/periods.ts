@@ -26,7 +26,8 @@ export const sheetInvoice = z
     issuedOn: z.string(),
     dueOn: z.string(),
     customerName: z.string(),
-    orderNumber: z.string(),
+    /** Null for what was sold from the shelf. */
+    orderNumber: z.string().nullable(),
     net: z.string(),
     tax: z.string(),
     total: z.string(),

@@ -7,6 +7,7 @@ import { StoredFile } from '../modules/files/stored-file.entity.ts';
 import { Design } from '../modules/designs/design.entity.ts';
 import { FinishedMovement } from '../modules/finished-pieces/finished-movement.entity.ts';
 import { FinishedPiece } from '../modules/finished-pieces/finished-piece.entity.ts';
+import { ShelfSale } from '../modules/finished-pieces/shelf-sale.entity.ts';
 import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { KitPart } from '../modules/hardware/kit-part.entity.ts';
 import { StandIn } from '../modules/hardware/stand-in.entity.ts';
@@ -65,6 +66,7 @@ export const entities = [
   Design,
   FinishedMovement,
   FinishedPiece,
+  ShelfSale,
   Hardware,
   IdempotentReply,
   Impression,

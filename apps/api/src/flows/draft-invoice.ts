@@ -4,6 +4,7 @@ import { invalid, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { Invoice } from '../modules/invoices/invoice.entity.ts';
 import { InvoiceLine } from '../modules/invoices/invoice-line.entity.ts';
+import { startDraft } from '../modules/invoices/start-draft.ts';
 import { currencyDigits, sumUp } from '../modules/invoices/sum-up.ts';
 import { Order } from '../modules/orders/order.entity.ts';
 import { chosenTaxRate } from '../modules/tax-rates/find-tax-rate.ts';
@@ -34,7 +35,7 @@ export async function draftInvoice(work: Work, asked: Asked): Promise<Invoice> {
   }
   await requireInvoiceable(work, order);
   const rate = await chosenTaxRate(work.em, asked.taxRateId);
-  const invoice = await blankInvoice(work, order);
+  const invoice = await startDraft(work, { orderId: order.id, customerId: order.customerId });
   await writeLines(work, invoice, order, rate);
   await sumUp(work, invoice);
   await logDeed(work, {
@@ -65,23 +66,6 @@ async function requireInvoiceable(work: Work, order: Order): Promise<void> {
   if (order.total.isZero()) {
     throw wrongState(`Nothing is to be paid for ${order.number}, so it needs no invoice.`, []);
   }
-}
-
-async function blankInvoice(work: Work, order: Order): Promise<Invoice> {
-  const nought = new Decimal(0);
-  const invoice = work.em.create(Invoice, {
-    orderId: order.id,
-    customerId: order.customerId,
-    state: 'draft',
-    net: nought,
-    tax: nought,
-    total: nought,
-    paid: nought,
-    credited: nought,
-    createdAt: work.now.toISOString(),
-  });
-  await work.em.flush();
-  return invoice;
 }
 
 async function writeLines(

@@ -50,7 +50,7 @@ export async function recordPayment(work: Work, received: Received): Promise<Inv
     subjectId: invoice.id,
     detail: { amount: moneyText(amount), receivedOn: payment.receivedOn, state: invoice.state },
   });
-  await closeIfSettled(work, invoice.orderId);
+  if (invoice.orderId !== null) await closeIfSettled(work, invoice.orderId);
   return invoice;
 }
 

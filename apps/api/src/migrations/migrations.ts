@@ -14,6 +14,7 @@ import { TheOrdersDue } from './migration-20261204-the-orders-due.ts';
 import { TheShelf } from './migration-20261204-the-shelf.ts';
 import { TheServices } from './migration-20261205-the-services.ts';
 import { TheWeights } from './migration-20261206-the-weights.ts';
+import { TheShelfSales } from './migration-20261207-the-shelf-sales.ts';
 import { TheDays } from './migration-20261208-the-days.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
@@ -34,5 +35,6 @@ export const migrations = [
   { name: 'migration-20261204-the-shelf', class: TheShelf },
   { name: 'migration-20261205-the-services', class: TheServices },
   { name: 'migration-20261206-the-weights', class: TheWeights },
+  { name: 'migration-20261207-the-shelf-sales', class: TheShelfSales },
   { name: 'migration-20261208-the-days', class: TheDays },
 ];

@@ -27,7 +27,8 @@ export interface InvoiceSnapshot {
   number: string;
   issuedOn: string;
   dueOn: string;
-  orderNumber: string;
+  /** Null for pieces that were sold from the shelf. */
+  orderNumber: string | null;
   title: string;
   currency: string;
   digits: number;
@@ -102,7 +103,7 @@ function drawFacts(paper: Paper, invoice: InvoiceSnapshot): number {
   const facts: [string, string][] = [
     ['issued', printedDay(invoice.issuedOn)],
     ['due', printedDay(invoice.dueOn)],
-    ['order', invoice.orderNumber],
+    ...(invoice.orderNumber === null ? [] : [['order', invoice.orderNumber] as [string, string]]),
   ];
   facts.forEach(([label, value], at) => {
     const y = firstLine + at * 30;

@@ -54,11 +54,19 @@ async function pieceOf({ em }: Work, kind: FinishedKind): Promise<FinishedPiece>
   return piece;
 }
 
+interface Taken {
+  as: 'sold' | 'given' | 'spoiled';
+  quantity: number;
+  reason: string;
+  /** The line of an invoice that they leave for, where one is written. */
+  shelfSaleId?: number;
+}
+
 /** @throws {Problem} 409 when fewer lie there */
 export async function takeFinishedPieces(
   work: Work,
   piece: FinishedPiece,
-  { as, quantity, reason }: { as: 'sold' | 'given' | 'spoiled'; quantity: number; reason: string },
+  { as, quantity, reason, shelfSaleId }: Taken,
 ): Promise<void> {
   const { onHand } = piece;
   if (quantity > onHand) {
@@ -69,7 +77,24 @@ export async function takeFinishedPieces(
     );
   }
   const value = costOf(piece, quantity).negated();
-  await move(work, piece, { kind: as, quantity: -quantity, value, jobId: null, reason });
+  await move(
+    work,
+    piece,
+    { kind: as, quantity: -quantity, value, jobId: null, reason },
+    shelfSaleId,
+  );
+}
+
+/** Lays what a sale took where it lay, at the very value that it left with. */
+export async function putBackFinished(
+  work: Work,
+  shelfSaleId: number,
+  reason: string,
+): Promise<void> {
+  const taken = await work.em.findOneOrFail(FinishedMovement, { shelfSaleId, kind: 'sold' });
+  const piece = await findFinished(work.em, taken.finishedPieceId);
+  const back = { quantity: -taken.quantity, value: taken.value.negated() };
+  await move(work, piece, { kind: 'put back', ...back, jobId: null, reason }, shelfSaleId);
 }
 
 /** Sets what is there to what was counted; a count that agrees moves nothing. */
@@ -103,11 +128,13 @@ async function move(
   work: Work,
   piece: FinishedPiece,
   moved: Pick<FinishedMovement, 'kind' | 'quantity' | 'value' | 'jobId' | 'reason'>,
+  shelfSaleId: number | null = null,
 ): Promise<void> {
   piece.onHand += moved.quantity;
   piece.value = piece.value.plus(moved.value);
   work.em.create(FinishedMovement, {
     ...moved,
+    shelfSaleId,
     finishedPieceId: piece.id,
     at: work.now.toISOString(),
     day: work.today,

@@ -19,7 +19,7 @@ export class FinishedMovement {
   day!: string;
 
   @Property({ type: 'text', columnType: 'text' })
-  kind!: 'made' | 'sold' | 'given' | 'spoiled' | 'count';
+  kind!: 'made' | 'sold' | 'given' | 'spoiled' | 'count' | 'put back';
 
   /** Signed: in is positive. */
   @Property({ type: 'integer', columnType: 'integer' })
@@ -31,6 +31,10 @@ export class FinishedMovement {
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   jobId: number | null = null;
+
+  /** The sale that took them, or that was undone. */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  shelfSaleId: number | null = null;
 
   @Property({ type: 'text', columnType: 'text' })
   reason!: string;

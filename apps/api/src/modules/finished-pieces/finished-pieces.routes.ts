@@ -6,16 +6,19 @@ import {
   listFinishedPieces,
   putOnShelf,
   readFinishedPiece,
+  sellFinished,
   takeFinished,
   type FinishedPiece as FinishedReply,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
 import { putOnShelfByHand } from '../../flows/put-on-shelf-by-hand.ts';
+import { sellFromShelf } from '../../flows/sell-from-shelf.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
+import { describeInvoice } from '../invoices/describe-invoice.ts';
 import { countFinishedPieces, findFinished, takeFinishedPieces } from './finished-ledger.ts';
 import { readFinishedList, readFinishedMovements, readOneFinished } from './read-finished.ts';
 
@@ -53,6 +56,10 @@ export function finishedPieceRoutes(context: Context): Router {
     const words = { sold: 'sold', given: 'gave away', spoiled: 'wrote off' };
     return told(work, piece.id, (of) => `${words[body.as]} ${body.quantity} of ${of}`, body);
   });
+
+  serve(router, context, sellFinished, async (work, { params, body }) =>
+    describeInvoice(work, await sellFromShelf(work, { pieceId: params.id, ...body })),
+  );
 
   serve(router, context, countFinished, async (work, { params, body }) => {
     const piece = await findFinished(work.em, params.id);

@@ -83,6 +83,8 @@ interface MovementRow {
   value: number;
   job_id: number | null;
   job_number: string | null;
+  invoice_id: number | null;
+  invoice_number: string | null;
   reason: string;
   actor_name: string;
 }
@@ -96,7 +98,10 @@ export async function readFinishedMovements(
     ...when(asked.below, 'm.id < ?'),
   ]);
   const rows = await em.execute<MovementRow[]>(
-    `SELECT m.*, j.number AS job_number FROM finished_movement m LEFT JOIN job j ON j.id = m.job_id
+    `SELECT m.*, j.number AS job_number, i.id AS invoice_id, i.number AS invoice_number
+    FROM finished_movement m LEFT JOIN job j ON j.id = m.job_id
+      LEFT JOIN shelf_sale s ON s.id = m.shelf_sale_id LEFT JOIN invoice_line l ON l.id = s.invoice_line_id
+      LEFT JOIN invoice i ON i.id = l.invoice_id
     ${where} ORDER BY m.id DESC LIMIT ?`,
     [...values, asked.limit],
   );
@@ -109,6 +114,7 @@ export async function readFinishedMovements(
     value: moneyText(unscaled(row.value, 2)),
     jobId: row.job_id,
     jobNumber: row.job_number,
+    invoice: row.invoice_id === null ? null : { id: row.invoice_id, number: row.invoice_number },
     reason: row.reason,
     actorName: row.actor_name,
   }));

@@ -3,12 +3,12 @@ import type { BodyOf, changeInvoice } from '@hidewright/contract';
 import { invalid } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
-import { Order } from '../orders/order.entity.ts';
 import { chosenTaxRate } from '../tax-rates/find-tax-rate.ts';
 import type { Invoice } from './invoice.entity.ts';
 import { InvoiceLine } from './invoice-line.entity.ts';
-import { InvoiceTax } from './invoice-tax.entity.ts';
+import { nextVersion } from './next-version.ts';
 import { sumUp } from './sum-up.ts';
+import { whoseDraft } from './whose-draft.ts';
 
 type Change = BodyOf<typeof changeInvoice>['lines'][number];
 
@@ -26,7 +26,7 @@ export async function changeDraft(work: Work, invoice: Invoice, changes: Change[
   await sumUp(work, invoice);
   await nextVersion(work, invoice);
   await logDeed(work, {
-    action: `changed the draft invoice for ${await orderNumber(work, invoice)}`,
+    action: `changed the draft invoice for ${await whoseDraft(work, invoice)}`,
     subjectKind: 'invoice',
     subjectId: invoice.id,
   });
@@ -44,26 +44,3 @@ async function changeLine(
   line.taxRateId = rate?.id ?? null;
   line.taxPercent = rate?.percent ?? new Decimal(0);
 }
-
-/** Its lines are part of it: whoever read it before they changed has read an older version. */
-async function nextVersion({ em }: Work, invoice: Invoice): Promise<void> {
-  await em.execute('UPDATE invoice SET version = version + 1 WHERE id = ?', [invoice.id]);
-  await em.refresh(invoice);
-}
-
-/** Takes a draft away; its order can be invoiced again. */
-export async function discardDraft(work: Work, invoice: Invoice): Promise<void> {
-  const order = await orderNumber(work, invoice);
-  const invoiceId = invoice.id;
-  await work.em.nativeDelete(InvoiceLine, { invoiceId });
-  await work.em.nativeDelete(InvoiceTax, { invoiceId });
-  await work.em.removeAndFlush(invoice);
-  await logDeed(work, {
-    action: `discarded the draft invoice for ${order}`,
-    subjectKind: 'invoice',
-    subjectId: invoiceId,
-  });
-}
-
-const orderNumber = async ({ em }: Work, invoice: Invoice) =>
-  (await em.findOneOrFail(Order, invoice.orderId)).number;

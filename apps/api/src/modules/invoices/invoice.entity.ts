@@ -17,8 +17,9 @@ export class Invoice {
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   sequence: number | null = null;
 
-  @Property({ type: 'integer', columnType: 'integer' })
-  orderId!: number;
+  /** Null where pieces were sold from the shelf. */
+  @Property({ type: 'integer', columnType: 'integer', nullable: true })
+  orderId: number | null = null;
 
   @Property({ type: 'integer', columnType: 'integer' })
   customerId!: number;

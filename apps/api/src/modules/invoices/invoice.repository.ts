@@ -1,6 +1,8 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
-import type { InvoiceState, InvoiceSummary } from '@hidewright/contract';
+import type { InvoiceState, InvoiceSummary, listInvoices, QueryOf } from '@hidewright/contract';
+import { when } from '../../db/sql-conditions.ts';
 import { customerName, matching, moneyOf, type AskedPage } from './read-rows.ts';
+import { soldFromShelf } from './whose-draft.ts';
 
 interface SummaryRow {
   id: number;
@@ -8,8 +10,8 @@ interface SummaryRow {
   state: InvoiceState;
   customer_id: number;
   customer_name: string;
-  order_id: number;
-  order_number: string;
+  order_id: number | null;
+  order_number: string | null;
   title: string;
   issued_on: string | null;
   due_on: string | null;
@@ -21,30 +23,38 @@ interface SummaryRow {
   version: number;
 }
 
+const title = `coalesce(customer_order.title, '${soldFromShelf}')`;
+
 const summarySql = (
   where: string,
 ) => `SELECT invoice.id, invoice.number, invoice.state, invoice.customer_id,
-    ${customerName} AS customer_name, invoice.order_id, customer_order.number AS order_number, customer_order.title,
+    ${customerName} AS customer_name, invoice.order_id, customer_order.number AS order_number, ${title} AS title,
     invoice.issued_on, invoice.due_on, invoice.net, invoice.tax, invoice.total, invoice.paid,
     invoice.total - invoice.paid - invoice.credited AS open, invoice.version
   FROM invoice JOIN customer ON customer.id = invoice.customer_id
-    JOIN customer_order ON customer_order.id = invoice.order_id
+    LEFT JOIN customer_order ON customer_order.id = invoice.order_id
   WHERE ${where}`;
+
+type Wanted = Partial<Pick<QueryOf<typeof listInvoices>, 'state' | 'customerId' | 'of'>>;
 
 /** One row more than asked for, so that a further page shows. */
 export async function listSummaries(
   em: EntityManager,
   today: string,
-  asked: AskedPage & { state: InvoiceState | undefined },
+  asked: AskedPage & Wanted,
 ): Promise<InvoiceSummary[]> {
-  const words = `coalesce(invoice.number, ''), ${customerName}, customer_order.number, customer_order.title`;
+  const words = `coalesce(invoice.number, ''), ${customerName}, customer_order.number, ${title}`;
   const { where, params } = matching('invoice.id', words, asked);
-  if (asked.state !== undefined) {
-    where.push('invoice.state = ?');
-    params.push(asked.state);
-  }
-  const sql = `${summarySql(where.join(' AND '))} ORDER BY invoice.id DESC LIMIT ?`;
-  const rows = await em.execute<SummaryRow[]>(sql, [...params, asked.limit + 1]);
+  const wanted = [
+    ...when(asked.state, 'invoice.state = ?'),
+    ...when(asked.customerId, 'invoice.customer_id = ?'),
+    ...when(asked.of, '(invoice.order_id IS NULL) = ?', (of) => [of === 'shelf' ? 1 : 0]),
+  ];
+  const conditions = [...where, ...wanted.map(({ sql }) => sql)].join(' AND ');
+  const rows = await em.execute<SummaryRow[]>(
+    `${summarySql(conditions)} ORDER BY invoice.id DESC LIMIT ?`,
+    [...params, ...wanted.flatMap(({ values }) => values), asked.limit + 1],
+  );
   return rows.map((row) => toSummary(row, today));
 }
 

@@ -11,17 +11,20 @@ import {
   readInvoice,
   readInvoicePaper,
   recordPayment as recordPaymentEndpoint,
+  removeInvoiceLine,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
+import { discardDraft } from '../../flows/discard-draft.ts';
 import { draftInvoice } from '../../flows/draft-invoice.ts';
 import { issueInvoice } from '../../flows/issue-invoice.ts';
 import { recordPayment } from '../../flows/record-payment.ts';
+import { takeOffDraft } from '../../flows/take-off-draft.ts';
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { wrongState } from '../../http/problem.ts';
 import { serve, serveFile } from '../../http/serve.ts';
 import type { Work } from '../../work.ts';
-import { changeDraft, discardDraft } from './change-draft.ts';
+import { changeDraft } from './change-draft.ts';
 import { describeInvoice, issuedWords } from './describe-invoice.ts';
 import { findDraft, findInvoice } from './find-invoice.ts';
 import { aged, sumByAge } from './invoice-ages.ts';
@@ -37,9 +40,9 @@ export function invoiceRoutes(context: Context): Router {
     router,
     context,
     listInvoices,
-    async ({ em, today }, { query: { cursor, limit, q, state } }) => {
-      const rows = await listSummaries(em, today, { below: readCursor(cursor), limit, q, state });
-      return toPage(rows, limit, (row) => row.id);
+    async ({ em, today }, { query: { cursor, limit, q, ...wanted } }) => {
+      const asked = { below: readCursor(cursor), limit, q, ...wanted };
+      return toPage(await listSummaries(em, today, asked), limit, (row) => row.id);
     },
   );
 
@@ -82,6 +85,12 @@ export function invoiceRoutes(context: Context): Router {
   serve(router, context, discardInvoice, async (work, { params }) => {
     await discardDraft(work, await findDraft(work.em, params.id));
     return { discarded: true as const };
+  });
+
+  serve(router, context, removeInvoiceLine, async (work, { params, ifMatch }) => {
+    const invoice = await draftAsRead(work, params.id, ifMatch);
+    await takeOffDraft(work, invoice, params.position);
+    return describeInvoice(work, invoice);
   });
 
   serve(router, context, issueInvoiceEndpoint, async (work, { params, body, ifMatch }) => {

@@ -106,6 +106,7 @@ describe('drafting', () => {
         taxPercent: '8.25',
         taxRateId: rate,
         taxName: 'Sales tax',
+        finishedPieceId: null,
       },
       {
         position: 2,
@@ -116,6 +117,7 @@ describe('drafting', () => {
         taxPercent: '8.25',
         taxRateId: rate,
         taxName: 'Sales tax',
+        finishedPieceId: null,
       },
     ]);
     expect(invoice).toMatchObject({ net: '138.38', tax: '11.42', total: '149.80', open: '149.80' });

@@ -10,6 +10,7 @@ import { Workshop } from '../workshop/workshop.entity.ts';
 import type { Invoice } from './invoice.entity.ts';
 import { InvoiceLine } from './invoice-line.entity.ts';
 import { InvoiceTax } from './invoice-tax.entity.ts';
+import { soldFromShelf } from './whose-draft.ts';
 
 /** What an invoice says at this moment, but for the number and days that issuing gives it. */
 export type Wording = Omit<InvoiceSnapshot, 'number' | 'issuedOn' | 'dueOn'>;
@@ -17,15 +18,15 @@ export type Wording = Omit<InvoiceSnapshot, 'number' | 'issuedOn' | 'dueOn'>;
 export async function wordingOf({ em }: Work, invoice: Invoice): Promise<Wording> {
   const workshop = await em.findOneOrFail(Workshop, 1);
   const customer = await em.findOneOrFail(Customer, invoice.customerId);
-  const order = await em.findOneOrFail(Order, invoice.orderId);
+  const order = invoice.orderId === null ? null : await em.findOneOrFail(Order, invoice.orderId);
   const taxes = await em.find(
     InvoiceTax,
     { invoiceId: invoice.id },
     { orderBy: { percent: 'asc' } },
   );
   return {
-    orderNumber: order.number,
-    title: order.title,
+    orderNumber: order?.number ?? null,
+    title: order?.title ?? soldFromShelf,
     currency: workshop.currency,
     digits: minorDigits(workshop.currency),
     workshop: { name: workshop.name, address: workshop.address, taxNumber: workshop.taxNumber },

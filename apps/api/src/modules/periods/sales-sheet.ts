@@ -64,7 +64,7 @@ interface InvoiceRow {
   tax: number;
   total: number;
   customer: string;
-  order_number: string;
+  order_number: string | null;
 }
 
 interface LineRow {

@@ -14,6 +14,7 @@ export const movedWords: Readonly<Record<FinishedMovement['kind'], string>> = {
   given: 'given away',
   spoiled: 'spoiled',
   count: 'counted',
+  'put back': 'put back',
 };
 
 type OnShelf = Pick<FinishedPiece, 'sort' | 'onHand' | 'option' | 'place' | 'customerId'>;

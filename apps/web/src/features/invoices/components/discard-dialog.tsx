@@ -13,6 +13,7 @@ interface DiscardDialogProps {
 export function DiscardDialog({ invoice, open, onOpenChange }: DiscardDialogProps) {
   const discard = useDiscardInvoice();
   const navigate = useNavigate();
+  const { orderNumber } = invoice;
   return (
     <ConfirmDialog
       open={open}
@@ -23,10 +24,13 @@ export function DiscardDialog({ invoice, open, onOpenChange }: DiscardDialogProp
       onConfirm={async () => {
         await discard.mutateAsync({ params: { id: invoice.id } });
         await navigate('/books/invoices');
-        say(`The draft for ${invoice.orderNumber} is discarded.`);
+        say(`The draft for ${orderNumber ?? invoice.customerName} is discarded.`);
       }}
     >
-      What was worded or chosen on its lines is lost. {invoice.orderNumber} can be invoiced again.
+      What was worded or chosen on its lines is lost.{' '}
+      {orderNumber === null
+        ? 'Its pieces lie on the shelf again.'
+        : `${orderNumber} can be invoiced again.`}
     </ConfirmDialog>
   );
 }

@@ -20,8 +20,13 @@ export function InvoiceTicket({ invoice, actions }: { invoice: Invoice; actions:
         title={invoice.customerName}
         detail={
           <>
-            {invoice.title},{' '}
-            <TextLink to={`/counter/orders/${invoice.orderId}`}>{invoice.orderNumber}</TextLink>
+            {invoice.title}
+            {invoice.orderId !== null && (
+              <>
+                {', '}
+                <TextLink to={`/counter/orders/${invoice.orderId}`}>{invoice.orderNumber}</TextLink>
+              </>
+            )}
           </>
         }
         facts={

@@ -8,18 +8,17 @@ import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { InvoiceStateMark } from './invoice-state.tsx';
 import { sumMoney } from '../../../lib/sum-money.ts';
 
+const nameOf = ({ number, orderNumber }: InvoiceSummary) =>
+  number ?? `draft ${orderNumber === null ? 'from the shelf' : `for ${orderNumber}`}`;
+
 function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
   const day = (text: string | null) => (text === null ? '–' : dayText(text, today));
   return [
     {
       id: 'number',
       header: 'Invoice',
-      value: (row) => row.number ?? `draft for ${row.orderNumber}`,
-      cell: (row) => (
-        <TextLink to={`/books/invoices/${row.id}`}>
-          {row.number ?? `draft for ${row.orderNumber}`}
-        </TextLink>
-      ),
+      value: nameOf,
+      cell: (row) => <TextLink to={`/books/invoices/${row.id}`}>{nameOf(row)}</TextLink>,
       onPhone: 'title',
     },
     { id: 'customer', header: 'Customer', value: (row) => row.customerName },

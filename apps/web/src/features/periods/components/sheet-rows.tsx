@@ -27,7 +27,12 @@ const invoiceColumns = (today: string): Column<SheetInvoice>[] => [
     cell: (row) => dayText(row.issuedOn, today),
   },
   { id: 'customer', header: 'Customer', value: (row) => row.customerName },
-  { id: 'order', header: 'Order', value: (row) => row.orderNumber },
+  {
+    id: 'order',
+    header: 'Order',
+    value: (row) => row.orderNumber,
+    cell: (row) => row.orderNumber ?? 'from the shelf',
+  },
   amountColumn('net', 'Net', (row) => row.net),
   amountColumn('tax', 'Tax', (row) => row.tax),
   amountColumn('total', 'Total', (row) => row.total),
