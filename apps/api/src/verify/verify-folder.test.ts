@@ -83,6 +83,21 @@ describe('verifying a data folder', () => {
       'the sum of their ledger',
     ],
     [
+      'what an invoice sold from the shelf',
+      `UPDATE invoice_line SET quantity = quantity + 1 WHERE id = (SELECT MIN(invoice_line_id) FROM shelf_sale)`,
+      'sells from the shelf left it',
+    ],
+    [
+      'a sale from the shelf that was undone by hand',
+      `UPDATE shelf_sale SET invoice_line_id = NULL, undone_at = '2026-12-01' WHERE id = 1`,
+      'what was undone lies there again',
+    ],
+    [
+      'what a line without an order stands for',
+      `DELETE FROM shelf_sale WHERE id = 1`,
+      'Every line of an invoice without an order',
+    ],
+    [
       'what is on hand',
       'UPDATE stock_balance SET on_hand = on_hand + 1 WHERE id = 1',
       'sum of its movements',

@@ -16,6 +16,7 @@ import { planCounts } from './play-counts.ts';
 import { planLocks } from './play-books.ts';
 import { planRun } from './play-run.ts';
 import { runs } from './scenario/runs.ts';
+import { planShelfSale } from './sell-shelf.ts';
 import { Year } from './year.ts';
 
 /**
@@ -47,6 +48,7 @@ async function playYear(config: Config): Promise<void> {
     planPurchases(shop, year, furnished);
     for (const run of runs) planRun({ shop, year, furnished }, run);
     planBorrowedPlate({ shop, year, furnished });
+    planShelfSale({ shop, year, furnished });
     planCounts(shop, year);
     planDyeing(shop, year);
     planLocks(shop, year);

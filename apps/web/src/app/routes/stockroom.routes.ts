@@ -112,6 +112,11 @@ export const stockroomRoutes: RouteObject[] = [
             handle: { crumb: finishedOf },
             lazy: () => import('./stockroom/finished.tsx'),
           },
+          {
+            path: ':id/sell',
+            handle: { crumb: finishedOf },
+            lazy: () => import('./stockroom/sell-finished.tsx'),
+          },
         ],
       },
       {

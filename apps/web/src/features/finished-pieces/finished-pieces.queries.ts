@@ -1,6 +1,7 @@
 import {
   listFinishedMovements,
   listFinishedPieces,
+  listInvoices,
   readFinishedPiece,
   readPattern,
   type QueryInputOf,
@@ -28,6 +29,17 @@ export function finishedPieceQuery(id: number) {
   return queryOptions({
     queryKey: ['finished-piece', id],
     queryFn: ({ signal }) => call(readFinishedPiece, { params: { id }, signal }),
+  });
+}
+
+/** The drafts that a customer has from the shelf, newest first; 0 while nobody is chosen. */
+export function shelfDraftsQuery(customerId: number) {
+  return queryOptions({
+    queryKey: ['invoices', 'shelf-drafts', customerId],
+    queryFn: ({ signal }) =>
+      call(listInvoices, { query: { of: 'shelf', state: 'draft', customerId, limit: 5 }, signal }),
+    enabled: customerId > 0,
+    select: ({ items }) => items,
   });
 }
 

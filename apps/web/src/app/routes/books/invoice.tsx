@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { BilledTo } from '../../../features/invoices/components/billed-to.tsx';
 import { ChangeLinesDialog } from '../../../features/invoices/components/change-lines-dialog.tsx';
@@ -12,6 +13,7 @@ import { InvoiceLines } from '../../../features/invoices/components/invoice-line
 import { InvoiceTicket } from '../../../features/invoices/components/invoice-ticket.tsx';
 import { PaymentsTable } from '../../../features/invoices/components/payments-table.tsx';
 import { invoiceQuery } from '../../../features/invoices/invoices.queries.ts';
+import { sessionQuery } from '../../../features/session/session.queries.ts';
 import { NoTaxAdvice } from '../../../features/tax-rates/components/no-tax-advice.tsx';
 import { taxRatesQuery } from '../../../features/tax-rates/tax-rates.queries.ts';
 import { percentText } from '../../../lib/formatting.ts';
@@ -28,13 +30,27 @@ export async function loader({ params }: LoaderFunctionArgs) {
 export function Component() {
   const { id } = useLoaderData<Invoice>();
   const { data: invoice } = useSuspenseQuery(invoiceQuery(id));
+  const { data: session } = useSuspenseQuery(sessionQuery());
   const isDraft = invoice.state === 'draft';
+  const sellsMore = invoice.orderId === null && session.person?.role === 'owner';
   return (
     <div className="space-y-5">
       <InvoiceTicket invoice={invoice} actions={<InvoiceActions invoice={invoice} />} />
       <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,22rem)]">
         <div className="space-y-5">
-          <InvoiceLines invoice={invoice} aside={isDraft && <ChangeLines invoice={invoice} />} />
+          <InvoiceLines
+            invoice={invoice}
+            aside={
+              isDraft && (
+                <div className="flex flex-wrap gap-2">
+                  {sellsMore && (
+                    <LinkButton to="/stockroom/finished">Add from the shelf</LinkButton>
+                  )}
+                  <ChangeLines invoice={invoice} />
+                </div>
+              )
+            }
+          />
           {!isDraft && (
             <Card title="Payments">
               <PaymentsTable

@@ -67,7 +67,7 @@ function NoInvoices({ anyWaiting }: { anyWaiting: boolean }) {
     <EmptyState title="No invoices yet.">
       {anyWaiting
         ? 'Begin with one of the orders above.'
-        : 'An order can be invoiced once it is packed; it then shows here.'}
+        : 'An order can be invoiced once it is packed; it then shows here. What lies finished on the shelf is sold from the stockroom.'}
     </EmptyState>
   );
 }

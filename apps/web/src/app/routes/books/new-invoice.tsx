@@ -15,8 +15,9 @@ import { DraftForm } from '../../../features/invoices/components/draft-form.tsx'
 import { ordersToInvoiceQuery } from '../../../features/invoices/invoices.queries.ts';
 import { AddTaxRateForm } from '../../../features/tax-rates/components/add-tax-rate-form.tsx';
 import { NoTaxAdvice } from '../../../features/tax-rates/components/no-tax-advice.tsx';
+import { rateCards, usualRate } from '../../../features/tax-rates/rate-cards.ts';
 import { taxRatesQuery } from '../../../features/tax-rates/tax-rates.queries.ts';
-import { countText, moneyText, percentText } from '../../../lib/formatting.ts';
+import { countText, moneyText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
@@ -52,7 +53,6 @@ function AskTax({ order }: { order: OrderToInvoice }) {
   const { data: rates } = useSuspenseQuery(taxRatesQuery());
   const [added, setAdded] = useState<TaxRate>();
   const [adding, setAdding] = useState(false);
-  const inUse = rates.items.filter((rate) => rate.active);
   return (
     <Card title={rates.usual === null ? 'Your first invoice: which tax?' : 'Tax'}>
       <div className="space-y-5">
@@ -60,12 +60,8 @@ function AskTax({ order }: { order: OrderToInvoice }) {
         <DraftForm
           key={added?.id}
           orderId={order.orderId}
-          rates={inUse.map(({ id, name, percent }) => ({
-            value: id,
-            label: name,
-            aside: percentText(percent, 4),
-          }))}
-          usual={added?.id ?? usualOf(inUse, rates.usual)}
+          rates={rateCards(rates)}
+          usual={added?.id ?? usualRate(rates)}
           actions={<Button onClick={() => setAdding(true)}>Enter a tax rate</Button>}
           onDrafted={(invoice) => navigate(`/books/invoices/${invoice.id}`)}
         />
@@ -81,13 +77,6 @@ function AskTax({ order }: { order: OrderToInvoice }) {
       </Dialog>
     </Card>
   );
-}
-
-/** What the last invoice used, unless it was retired since. */
-function usualOf(inUse: readonly TaxRate[], usual: { taxRateId: number | null } | null) {
-  if (usual === null) return undefined;
-  const { taxRateId } = usual;
-  return taxRateId === null || inUse.some(({ id }) => id === taxRateId) ? taxRateId : undefined;
 }
 
 function WhatIsInvoiced({ order }: { order: OrderToInvoice }) {

@@ -2,6 +2,7 @@ import type { FinishedPiece } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
+import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { CountFinishedForm } from '../../../features/finished-pieces/components/count-finished-form.tsx';
@@ -30,10 +31,20 @@ export async function loader({ params }: LoaderFunctionArgs) {
 export function Component() {
   const { id } = useLoaderData<FinishedPiece>();
   const { data: piece } = useSuspenseQuery(finishedPieceQuery(id));
-  const { handlesStock } = useRole();
+  const { handlesStock, isOwner } = useRole();
   return (
     <>
-      <PageHeader title={finishedName(piece)} />
+      <PageHeader
+        title={finishedName(piece)}
+        action={
+          isOwner &&
+          piece.onHand > 0 && (
+            <LinkButton to={`/stockroom/finished/${id}/sell`} tone="primary">
+              Sell with an invoice
+            </LinkButton>
+          )
+        }
+      />
       <ItemLayout
         facts={<FinishedFacts piece={piece} />}
         aside={handlesStock && <Hands piece={piece} />}
@@ -49,7 +60,7 @@ export function Component() {
 function Hands({ piece }: { piece: FinishedPiece }) {
   return (
     <>
-      <Card title="Take from the shelf">
+      <Card title="Take from the shelf" subtitle="without an invoice">
         <TakeFinishedForm key={piece.id} piece={piece} />
       </Card>
       <Card title="Count" subtitle="to what is really there">

@@ -4,6 +4,7 @@ import { useMemo } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { countText, instantText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { finishedMovementsQuery } from '../finished-pieces.queries.ts';
@@ -38,9 +39,24 @@ function columnsFor(
       align: 'right',
     },
     ...(withValues ? [value] : []),
-    { id: 'reason', header: 'Why', value: (row) => row.reason, cell: (row) => row.reason || '–' },
+    {
+      id: 'reason',
+      header: 'Why',
+      value: (row) => row.reason,
+      cell: (row) => <Why row={row} />,
+    },
     { id: 'by', header: 'By', value: (row) => row.actorName },
   ];
+}
+
+function Why({ row: { reason, invoice } }: { row: FinishedMovement }) {
+  if (!invoice) return reason || '–';
+  return (
+    <>
+      {reason},{' '}
+      <TextLink to={`/books/invoices/${invoice.id}`}>{invoice.number ?? 'draft invoice'}</TextLink>
+    </>
+  );
 }
 
 /** What came to the shelf and left it: nothing in it is ever changed. */

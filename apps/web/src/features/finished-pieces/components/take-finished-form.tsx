@@ -9,7 +9,7 @@ import { movedWords } from '../finished-words.ts';
 import { useTakeFinished } from '../finished-pieces.mutations.ts';
 
 const ways = [
-  { value: 'sold', label: 'Sold' },
+  { value: 'sold', label: 'Sold over the counter', detail: 'paid on the spot, no invoice' },
   { value: 'given', label: 'Given away' },
   { value: 'spoiled', label: 'Spoiled' },
 ];
@@ -34,7 +34,7 @@ export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
       <TextField
         name="reason"
         label="To whom, or why"
-        help="What was paid is not noted here: this writes no invoice."
+        help="This writes no invoice and enters no money in the books."
       />
     </Form>
   );

@@ -1,13 +1,23 @@
 import type { Invoice, InvoiceLine } from '@hidewright/contract';
-import type { ReactNode } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
+import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { Stitch } from '../../../components/stitch.tsx';
+import { TextLink } from '../../../components/text-link.tsx';
 import { countText, moneyText, percentText, unitPriceText } from '../../../lib/formatting.ts';
+import { PutBackDialog } from './put-back-dialog.tsx';
 
 const columns: Column<InvoiceLine>[] = [
-  { id: 'for', header: 'For', value: (row) => row.description, onPhone: 'title', sortable: false },
+  {
+    id: 'for',
+    header: 'For',
+    value: (row) => row.description,
+    cell: (row) => <WhatFor line={row} />,
+    onPhone: 'title',
+    sortable: false,
+  },
   {
     id: 'quantity',
     header: 'Quantity',
@@ -44,17 +54,47 @@ const columns: Column<InvoiceLine>[] = [
 const taxOf = ({ taxName, taxPercent }: InvoiceLine) =>
   taxPercent === null ? 'no tax' : `${taxName ?? 'tax'} ${percentText(taxPercent, 4)}`;
 
+/** What was sold from the shelf leads to where it lay. */
+function WhatFor({ line: { description, finishedPieceId } }: { line: InvoiceLine }) {
+  return finishedPieceId === null ? (
+    description
+  ) : (
+    <TextLink to={`/stockroom/finished/${finishedPieceId}`}>{description}</TextLink>
+  );
+}
+
+const putBackColumn = (onPutBack: (line: InvoiceLine) => void): Column<InvoiceLine> => ({
+  id: 'put-back',
+  header: '',
+  value: () => '',
+  cell: (row) => (
+    <Button aria-label={`Put ${row.description} back on the shelf`} onClick={() => onPutBack(row)}>
+      Put back
+    </Button>
+  ),
+  align: 'right',
+  sortable: false,
+});
+
 /** The lines, and below them net, tax by rate and total. */
 export function InvoiceLines({ invoice, aside }: { invoice: Invoice; aside?: ReactNode }) {
+  const [goes, setGoes] = useState<InvoiceLine>();
+  // The last line of a draft goes with the draft.
+  const canLose = invoice.state === 'draft' && invoice.orderId === null && invoice.lines.length > 1;
+  const shown = useMemo(
+    () => (canLose ? [...columns, putBackColumn(setGoes)] : columns),
+    [canLose],
+  );
   return (
     <Card title="Lines" aside={aside}>
       <DataTable
         label="Lines"
         rows={invoice.lines}
         rowId={(row) => row.position}
-        columns={columns}
+        columns={shown}
         empty={null}
       />
+      {goes && <PutBackDialog invoice={invoice} line={goes} onClose={() => setGoes(undefined)} />}
       <Stitch className="my-3" />
       <dl className="ml-auto grid max-w-md grid-cols-[1fr_auto] gap-x-6 gap-y-1 px-3 text-right">
         <Sum word="Net" amount={invoice.net} />

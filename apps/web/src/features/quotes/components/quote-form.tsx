@@ -2,6 +2,7 @@ import { quoteBody, type QuoteBody, type QuoteTerms } from '@hidewright/contract
 import type { RunInput } from '@hidewright/domain';
 import type { ReactNode } from 'react';
 import type { z } from 'zod';
+import { CustomerField } from '../../../components/customer-field.tsx';
 import { Card } from '../../../components/card.tsx';
 import { DayField } from '../../../components/day-field.tsx';
 import { Form } from '../../../components/form.tsx';
@@ -12,7 +13,6 @@ import { TextArea } from '../../../components/text-area.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { usePreview } from '../use-preview.ts';
-import { CustomerField } from './customer-field.tsx';
 import { OptionFields } from './option-fields.tsx';
 import { OverrideFields } from './override-fields.tsx';
 import { PatternField } from './pattern-field.tsx';

@@ -1,15 +1,15 @@
 import { useEffect, useState, type ReactNode } from 'react';
 import { useFormContext } from 'react-hook-form';
-import { Button } from '../../../components/button.tsx';
-import { Dialog } from '../../../components/dialog.tsx';
-import { SelectField, type Choice } from '../../../components/select-field.tsx';
+import { Button } from './button.tsx';
+import { Dialog } from './dialog.tsx';
+import { SelectField, type Choice } from './select-field.tsx';
 
 interface CustomerFieldProps {
   choices: readonly Choice[];
   newCustomer: (onAdded: (id: number) => void) => ReactNode;
 }
 
-/** Who asks; somebody new is added on the spot. */
+/** Who asks or buys; somebody new is added on the spot. */
 export function CustomerField({ choices, newCustomer }: CustomerFieldProps) {
   const { setValue } = useFormContext();
   const [open, setOpen] = useState(false);
