@@ -192,6 +192,12 @@ const lists: { name: string; list: string; page: (id: number) => string; roles: 
     roles: ['owner', 'maker'],
   },
   {
+    name: 'sell-finished',
+    list: '/finished-pieces?there=yes',
+    page: (id) => `/stockroom/finished/${id}/sell`,
+    roles: ['owner'],
+  },
+  {
     name: 'supplier',
     list: '/suppliers',
     page: (id) => `/stockroom/suppliers/${id}`,
