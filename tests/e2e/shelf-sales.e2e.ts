@@ -48,8 +48,7 @@ async function sellAs(page: Page, piece: Piece, typed: { customer?: string; quan
   await page.getByLabel('How many').fill(String(typed.quantity));
 }
 
-const take = (page: Page) =>
-  page.getByRole('button', { name: 'Take them and draft the invoice' }).click();
+const take = (page: Page) => page.getByRole('button', { name: 'Sell them' }).click();
 
 test('an owner sells seconds from the shelf, adds to the draft, issues it and is paid', async () => {
   const { page, complaints, close } = await open('owner', wide);
@@ -78,14 +77,17 @@ test('an owner sells seconds from the shelf, adds to the draft, issues it and is
   expect(await now(page, second)).toMatchObject({ onHand: second.onHand - 2 });
 
   await page.getByRole('link', { name: 'Add from the shelf' }).click();
-  await page.getByRole('heading', { level: 1, name: 'Finished pieces' }).waitFor();
-  await sellAs(page, first, { customer: 'Quillfeather Books', quantity: 1 });
+  await page.getByText('What Quillfeather Books could have').waitFor();
+  await expectAccessible(page);
+  await page.getByRole('link', { name: `Sell ${first.patternName}`, exact: true }).click();
   await page.getByText('Add to their draft').waitFor();
+  await page.getByLabel('How many').fill('1');
   await page.getByLabel('Price each').fill('1.9');
   await expectAccessible(page);
   await take(page);
-  const putBack = page.getByRole('button', { name: /^Put .* back on the shelf$/ });
+  const putBack = page.getByRole('button', { name: `Put back ${second.patternName}` });
   await putBack.nth(1).waitFor();
+  await expectAccessible(page);
   await putBack.first().click();
   await page.getByRole('alertdialog').getByText('lie on the shelf again').waitFor();
   await expectAccessible(page);
@@ -96,6 +98,9 @@ test('an owner sells seconds from the shelf, adds to the draft, issues it and is
   await page.getByRole('button', { name: 'Issue', exact: true }).click();
   await page.getByRole('button', { name: 'Issue the invoice' }).click();
   await page.getByText(/^Invoice I-\d+ is issued\.$/).waitFor();
+  const buyer = (
+    await read<{ customerId: number }>(page, `invoices/${page.url().split('/').pop()}`)
+  ).customerId;
   const paper = await page.getByRole('link', { name: 'PDF' }).getAttribute('href');
   const file = await page.request.get(new URL(paper ?? '', hidewright.url).href);
   expect((await file.body()).subarray(0, 5).toString()).toBe('%PDF-');
@@ -108,6 +113,9 @@ test('an owner sells seconds from the shelf, adds to the draft, issues it and is
     .getByRole('link', { name: /^I-\d+$/ })
     .first()
     .waitFor();
+  await page.goto(`${hidewright.url}/counter/customers/${buyer}`);
+  await page.getByRole('cell', { name: 'Pieces from the shelf' }).first().waitFor();
+  await expectAccessible(page);
   // The one refusal that the walk provokes.
   expect(complaints.filter((said) => !/status of 409/.test(said))).toEqual([]);
   await close();

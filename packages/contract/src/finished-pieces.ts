@@ -74,6 +74,8 @@ export const listFinishedPieces = endpoint({
     patternId: z.coerce.number().int().positive().optional(),
     /** Only those of which there are any. */
     there: z.enum(['yes', 'no']).optional(),
+    /** Only those that this customer could have: with their mark, or with nobody's. */
+    forCustomer: z.coerce.number().int().positive().optional(),
   }),
   reply: page(finishedPiece),
 });

@@ -16,7 +16,7 @@ export function DataTableRow<Row>({ columns, row }: { columns: readonly Column<R
               {column.header}
             </span>
           )}
-          <span className="min-w-0 text-right wrap-anywhere md:contents">
+          <span className="min-w-0 text-right wrap-anywhere md:contents md:[text-align:inherit]">
             {column.cell ? column.cell(row) : column.value(row)}
           </span>
         </td>

@@ -10,6 +10,7 @@ interface Asked {
   below?: number | undefined;
   patternId?: number | readonly number[] | undefined;
   there?: 'yes' | 'no' | undefined;
+  forCustomer?: number | undefined;
   q?: string | undefined;
   limit: number;
 }
@@ -38,6 +39,7 @@ export async function readFinishedList(em: EntityManager, asked: Asked): Promise
       'f.pattern_id IN (SELECT value FROM json_each(?))',
     ),
     ...when(asked.there, '(f.on_hand > 0) = ?', (there) => [there === 'yes' ? 1 : 0]),
+    ...when(asked.forCustomer, 'COALESCE(f.customer_id, ?) = ?', (id) => [id, id]),
     ...when(asked.q, '(p.name LIKE ? OR c.name LIKE ?)', (q) => [`%${q}%`, `%${q}%`]),
   ]);
   const rows = await em.execute<Row[]>(

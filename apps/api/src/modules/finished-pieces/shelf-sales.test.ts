@@ -147,6 +147,15 @@ describe('selling from the shelf', () => {
     expect(await ids('q=from the shelf')).toEqual([shelf.id]);
     expect(await ids('q=tern')).toEqual([shelf.id]);
   });
+
+  it('begins with what a customer could have: no other’s mark', async () => {
+    const marked = await put({ quantity: 3, customerId: ready.customer.id });
+    const could = async (customer: number) =>
+      (await read<{ items: FinishedPiece[] }>(`finished-pieces?there=yes&forCustomer=${customer}`))
+        .items;
+    expect((await could(buyer)).map(({ id }) => id)).toEqual([seconds.id]);
+    expect((await could(ready.customer.id)).map(({ id }) => id)).toEqual([marked.id, seconds.id]);
+  });
 });
 
 describe('a draft from the shelf', () => {

@@ -11,6 +11,10 @@ import { call } from '../../lib/api.ts';
 
 type Asked = Omit<QueryInputOf<typeof listFinishedPieces>, 'cursor' | 'limit'>;
 
+/** The whole shelf, or what lies there that one customer could have. */
+export const shelfAsked = (forCustomer: number | undefined): Asked =>
+  forCustomer === undefined ? {} : { forCustomer, there: 'yes' };
+
 /** What lies finished on the shelf, kind by kind. */
 export function finishedPiecesQuery(asked: Asked = {}) {
   return infiniteQueryOptions({

@@ -10,7 +10,12 @@ import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
 /** Invoices, newest first, page by page. */
-export function invoicesQuery(wanted: { state?: InvoiceState | undefined } = {}) {
+interface Wanted {
+  state?: InvoiceState | undefined;
+  customerId?: number | undefined;
+}
+
+export function invoicesQuery(wanted: Wanted = {}) {
   return infiniteQueryOptions({
     queryKey: ['invoices', 'list', wanted],
     queryFn: ({ signal, pageParam }) =>

@@ -44,7 +44,9 @@ export function Component() {
               isDraft && (
                 <div className="flex flex-wrap gap-2">
                   {sellsMore && (
-                    <LinkButton to="/stockroom/finished">Add from the shelf</LinkButton>
+                    <LinkButton to={`/stockroom/finished?for=${invoice.customerId}`}>
+                      Add from the shelf
+                    </LinkButton>
                   )}
                   <ChangeLines invoice={invoice} />
                 </div>

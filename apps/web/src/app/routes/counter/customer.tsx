@@ -8,9 +8,12 @@ import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { ChangeCustomerForm } from '../../../features/customers/components/change-customer-form.tsx';
 import { customerQuery } from '../../../features/customers/customers.queries.ts';
+import { InvoicesTable } from '../../../features/invoices/components/invoices-table.tsx';
+import { invoicesQuery } from '../../../features/invoices/invoices.queries.ts';
 import { QuotesTable } from '../../../features/quotes/components/quotes-table.tsx';
 import { quotesQuery } from '../../../features/quotes/quotes.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
+import { ShowEarlier } from '../../../components/show-earlier.tsx';
 import { queryClient } from '../../../lib/query-client.ts';
 
 export async function loader({ params }: LoaderFunctionArgs) {
@@ -18,6 +21,7 @@ export async function loader({ params }: LoaderFunctionArgs) {
   const [customer] = await Promise.all([
     queryClient.ensureQueryData(customerQuery(id)),
     queryClient.ensureInfiniteQueryData(quotesQuery({ customerId: id })),
+    queryClient.ensureInfiniteQueryData(invoicesQuery({ customerId: id })),
   ]);
   return customer;
 }
@@ -40,17 +44,45 @@ export function Component() {
         <Card title="How to reach them">
           <ChangeCustomerForm key={customer.id} customer={customer} />
         </Card>
-        <Card title="Their quotes">
-          <QuotesTable
-            rows={quotes?.pages.flatMap((page) => page.items) ?? []}
-            withoutCustomer
-            empty={
-              <EmptyState title="No quotes for them yet." action={isOwner ? newQuote : undefined} />
-            }
-          />
-        </Card>
+        <div className="space-y-5">
+          <Card title="Their quotes">
+            <QuotesTable
+              rows={quotes?.pages.flatMap((page) => page.items) ?? []}
+              withoutCustomer
+              empty={
+                <EmptyState
+                  title="No quotes for them yet."
+                  action={isOwner ? newQuote : undefined}
+                />
+              }
+            />
+          </Card>
+          <Card title="Their invoices" aside={isOwner && <SellTo id={id} />}>
+            <TheirInvoices id={id} />
+          </Card>
+        </div>
       </div>
     </>
+  );
+}
+
+function SellTo({ id }: { id: number }) {
+  return <LinkButton to={`/stockroom/finished?for=${id}`}>Sell from the shelf</LinkButton>;
+}
+
+function TheirInvoices({ id }: { id: number }) {
+  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(
+    invoicesQuery({ customerId: id }),
+  );
+  return (
+    <InvoicesTable
+      rows={data?.pages.flatMap((page) => page.items) ?? []}
+      ofOneCustomer
+      empty={<p className="text-ink-soft">They have no invoice yet.</p>}
+      after={
+        <ShowEarlier pages={{ hasNextPage, isFetchingNextPage, fetchNextPage }} what="invoices" />
+      }
+    />
   );
 }
 

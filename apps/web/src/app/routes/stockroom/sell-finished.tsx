@@ -1,6 +1,11 @@
 import type { FinishedPiece } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { useLoaderData, useNavigate, type LoaderFunctionArgs } from 'react-router-dom';
+import {
+  useLoaderData,
+  useNavigate,
+  useSearchParams,
+  type LoaderFunctionArgs,
+} from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
@@ -43,14 +48,21 @@ export function Component() {
 
 function Sale({ piece }: { piece: FinishedPiece }) {
   const navigate = useNavigate();
+  const [search] = useSearchParams();
   const { data: customers } = useSuspenseQuery(customersQuery());
   const { data: rates } = useSuspenseQuery(taxRatesQuery());
+  const choices = choicesOf(customers.items);
+  const asked = Number(search.get('customer'));
   return (
     <div className="grid items-start gap-5 lg:grid-cols-2">
-      <Card title="To whom, and for how much">
+      <Card
+        title="To whom, and for how much"
+        subtitle="They leave the shelf at once; the invoice is a draft until it is issued."
+      >
         <SellForm
           piece={piece}
-          customers={choicesOf(customers.items)}
+          customers={choices}
+          buyer={choices.some(({ value }) => value === asked) ? asked : undefined}
           newCustomer={(onAdded) => <AddCustomerForm brief onAdded={({ id }) => onAdded(id)} />}
           rates={rateCards(rates)}
           newRate={(onAdded) => <AddTaxRateForm onAdded={({ id }) => onAdded(id)} />}

@@ -24,7 +24,7 @@ export function DraftChoice() {
         ...drafts.map(({ id, net }) => ({
           value: id,
           label: 'Add to their draft',
-          aside: `${moneyText(net)} ${currency} so far`,
+          detail: `${moneyText(net)} ${currency} before tax so far`,
         })),
         { value: null, label: 'A new invoice' },
       ]}

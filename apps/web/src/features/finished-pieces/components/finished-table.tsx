@@ -9,9 +9,14 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { countText, moneyText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { finishedPiecesQuery } from '../finished-pieces.queries.ts';
+import { finishedPiecesQuery, shelfAsked } from '../finished-pieces.queries.ts';
+import { finishedName } from '../finished-words.ts';
 
-function columnsFor(currency: string, withValues: boolean): Column<FinishedPiece>[] {
+function columnsFor(
+  currency: string,
+  withValues: boolean,
+  sellTo: string | undefined,
+): Column<FinishedPiece>[] {
   const value: Column<FinishedPiece> = {
     id: 'value',
     header: `At cost, ${currency}`,
@@ -49,17 +54,43 @@ function columnsFor(currency: string, withValues: boolean): Column<FinishedPiece
       total: (rows) => countText(rows.reduce((sum, { onHand }) => sum + onHand, 0)),
     },
     ...(withValues ? [value] : []),
+    ...(sellTo === undefined ? [] : [sellColumn(sellTo)]),
   ];
 }
 
-/** Finished pieces, kind by kind. */
-export function FinishedTable() {
+const sellColumn = (sellTo: string): Column<FinishedPiece> => ({
+  id: 'sell',
+  header: 'Sale',
+  value: () => '',
+  cell: (row) =>
+    row.onHand > 0 && (
+      <TextLink to={`/stockroom/finished/${row.id}/sell${sellTo}`}>
+        Sell<span className="sr-only"> {finishedName(row)}</span>
+      </TextLink>
+    ),
+  align: 'right',
+  sortable: false,
+});
+
+interface FinishedTableProps {
+  /** Only what this customer could have. */
+  forCustomer?: number | undefined;
+  sells: boolean;
+}
+
+/** Finished pieces, kind by kind; whoever sells goes on from a row. */
+export function FinishedTable({ forCustomer, sells }: FinishedTableProps) {
   const { currency } = useWorkshop();
-  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } =
-    useInfiniteQuery(finishedPiecesQuery());
+  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery(
+    finishedPiecesQuery(shelfAsked(forCustomer)),
+  );
   const rows = useMemo(() => data?.pages.flatMap((page) => page.items) ?? [], [data]);
   const withValues = rows.some((row) => row.value !== undefined);
-  const columns = useMemo(() => columnsFor(currency, withValues), [currency, withValues]);
+  const sellTo = sells ? (forCustomer ? `?customer=${forCustomer}` : '') : undefined;
+  const columns = useMemo(
+    () => columnsFor(currency, withValues, sellTo),
+    [currency, withValues, sellTo],
+  );
   return (
     <DataTable
       label="Finished pieces"

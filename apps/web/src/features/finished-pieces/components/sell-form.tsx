@@ -14,6 +14,8 @@ import { SaleSum } from './sale-sum.tsx';
 interface SellFormProps extends RateFieldProps {
   piece: FinishedPiece;
   customers: readonly Choice[];
+  /** Who is chosen to begin with, where nobody's mark decides. */
+  buyer: number | undefined;
   newCustomer: (onAdded: (id: number) => void) => ReactNode;
   /** Chosen to begin with; nothing at the first invoice, when it must be said. */
   usualRate: number | null | undefined;
@@ -23,18 +25,19 @@ interface SellFormProps extends RateFieldProps {
 
 /** Sells pieces of one kind: they leave the shelf, and stand on a draft invoice. */
 export function SellForm(props: SellFormProps) {
-  const { piece, customers, newCustomer, rates, newRate, usualRate, actions, onSold } = props;
+  const { piece, customers, buyer, newCustomer, rates, newRate, usualRate, actions, onSold } =
+    props;
   const sell = useSellFinished();
   const { id, customerId, customerName, onHand } = piece;
   return (
     <Form
       schema={sellFinished.body}
       defaults={{
-        ...{ customerId: customerId ?? ('' as unknown as number), draftId: null },
+        ...{ customerId: customerId ?? buyer ?? ('' as unknown as number), draftId: null },
         ...{ quantity: '' as unknown as number, unitPrice: '' },
         ...(usualRate !== undefined && { taxRateId: usualRate }),
       }}
-      submitWord="Take them and draft the invoice"
+      submitWord="Sell them"
       actions={actions}
       draftKey={`sell-finished-${id}`}
       onSend={async (body) =>

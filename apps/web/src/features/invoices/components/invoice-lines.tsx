@@ -65,11 +65,11 @@ function WhatFor({ line: { description, finishedPieceId } }: { line: InvoiceLine
 
 const putBackColumn = (onPutBack: (line: InvoiceLine) => void): Column<InvoiceLine> => ({
   id: 'put-back',
-  header: '',
+  header: 'Not wanted',
   value: () => '',
   cell: (row) => (
-    <Button aria-label={`Put ${row.description} back on the shelf`} onClick={() => onPutBack(row)}>
-      Put back
+    <Button onClick={() => onPutBack(row)}>
+      Put back<span className="sr-only"> {row.description}</span>
     </Button>
   ),
   align: 'right',

@@ -11,8 +11,22 @@ import { sumMoney } from '../../../lib/sum-money.ts';
 const nameOf = ({ number, orderNumber }: InvoiceSummary) =>
   number ?? `draft ${orderNumber === null ? 'from the shelf' : `for ${orderNumber}`}`;
 
-function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
+function columnsFor(
+  { currency, today }: Workshop,
+  ofOneCustomer: boolean,
+): Column<InvoiceSummary>[] {
   const day = (text: string | null) => (text === null ? '–' : dayText(text, today));
+  const due: Column<InvoiceSummary> = {
+    id: 'due',
+    header: 'Due',
+    value: (row) => row.dueOn,
+    cell: (row) => day(row.dueOn),
+  };
+  const customer: Column<InvoiceSummary> = {
+    id: 'customer',
+    header: 'Customer',
+    value: (row) => row.customerName,
+  };
   return [
     {
       id: 'number',
@@ -21,7 +35,7 @@ function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
       cell: (row) => <TextLink to={`/books/invoices/${row.id}`}>{nameOf(row)}</TextLink>,
       onPhone: 'title',
     },
-    { id: 'customer', header: 'Customer', value: (row) => row.customerName },
+    ...(ofOneCustomer ? [] : [customer]),
     { id: 'title', header: 'For', value: (row) => row.title },
     {
       id: 'state',
@@ -35,7 +49,7 @@ function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
       value: (row) => row.issuedOn,
       cell: (row) => day(row.issuedOn),
     },
-    { id: 'due', header: 'Due', value: (row) => row.dueOn, cell: (row) => day(row.dueOn) },
+    ...(ofOneCustomer ? [] : [due]),
     {
       id: 'total',
       header: `Total, ${currency}`,
@@ -57,13 +71,14 @@ function columnsFor({ currency, today }: Workshop): Column<InvoiceSummary>[] {
 
 interface InvoicesTableProps {
   rows: readonly InvoiceSummary[];
+  ofOneCustomer?: boolean | undefined;
   empty: ReactNode;
   after?: ReactNode;
 }
 
-export function InvoicesTable({ rows, empty, after }: InvoicesTableProps) {
+export function InvoicesTable({ rows, ofOneCustomer = false, empty, after }: InvoicesTableProps) {
   const workshop = useWorkshop();
-  const columns = useMemo(() => columnsFor(workshop), [workshop]);
+  const columns = useMemo(() => columnsFor(workshop, ofOneCustomer), [workshop, ofOneCustomer]);
   return (
     <DataTable
       label="Invoices"
@@ -71,7 +86,7 @@ export function InvoicesTable({ rows, empty, after }: InvoicesTableProps) {
       rowId={(row) => row.id}
       columns={columns}
       empty={empty}
-      filterLabel="Filter invoices"
+      filterLabel={ofOneCustomer ? undefined : 'Filter invoices'}
       after={after}
     />
   );

@@ -27,7 +27,7 @@ export function PutBackDialog({ invoice, line, onClose }: PutBackDialogProps) {
         say(`${what}: on the shelf again.`);
       }}
     >
-      The line goes, and the pieces lie on the shelf again at what they left with.
+      The line goes, and the pieces lie on the shelf again at the cost they left with.
     </ConfirmDialog>
   );
 }
