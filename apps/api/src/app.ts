@@ -30,6 +30,7 @@ import { lotSearchRoutes } from './modules/lots/lot-searches.routes.ts';
 import { lotRoutes } from './modules/lots/lots.routes.ts';
 import { orderSuggestionRoutes } from './modules/order-suggestions/order-suggestions.routes.ts';
 import { offcutRoutes } from './modules/lots/offcuts.routes.ts';
+import { orderChangeRoutes } from './modules/orders/order-changes.routes.ts';
 import { orderRoutes } from './modules/orders/orders.routes.ts';
 import { learnedRoutes } from './modules/patterns/learned.routes.ts';
 import { patternRoutes } from './modules/patterns/patterns.routes.ts';
@@ -71,6 +72,7 @@ const rooms: ((context: Context) => Router)[] = [
   quoteRoutes,
   linkRoutes,
   orderRoutes,
+  orderChangeRoutes,
   checkRoutes,
   patternRoutes,
   learnedRoutes,

@@ -21,6 +21,7 @@ import * as lotSearches from './lot-searches.ts';
 import * as lots from './lots.ts';
 import * as orderSuggestions from './order-suggestions.ts';
 import * as offcuts from './offcuts.ts';
+import * as orderChanges from './order-changes.ts';
 import * as orders from './orders.ts';
 import * as patterns from './patterns.ts';
 import * as people from './people.ts';
@@ -63,6 +64,7 @@ const rooms: Record<string, unknown>[] = [
   quotes,
   links,
   orders,
+  orderChanges,
   checks,
   patterns,
   learned,

@@ -27,6 +27,7 @@ export * from './lot-searches.ts';
 export * from './lots.ts';
 export * from './order-suggestions.ts';
 export * from './offcuts.ts';
+export * from './order-changes.ts';
 export * from './orders.ts';
 export * from './patterns.ts';
 export * from './people.ts';

@@ -23,6 +23,8 @@ export const jobCard = z
     number: paperNumber,
     state: jobState,
     orderId: id,
+    /** Its order was cancelled: nothing more is made of it. */
+    cancelled: z.boolean(),
     title: z.string(),
     customerName: z.string(),
     quantity: count,
@@ -156,6 +158,18 @@ export const letGo = endpoint({
   creates: true,
   params: idParams,
   body: z.union([z.strictObject({ lotId: id }), z.strictObject({ hardwareId: id })]),
+  reply: job,
+});
+
+export const returnFromJob = endpoint({
+  method: 'POST',
+  path: '/jobs/{id}/returns',
+  summary:
+    'Put back what the job has taken of a lot or of hardware and does not use; it is free again',
+  access: bench,
+  creates: true,
+  params: idParams,
+  body: amountOfStock,
   reply: job,
 });
 

@@ -40,6 +40,16 @@ export const offer = z
     agreedQuantity: runQuantity.nullable(),
     agreedOption: z.string().nullable(),
     agreedOn: day.nullable(),
+    /** What became of it once the shop took it on; null before. */
+    order: z
+      .object({
+        number: paperNumber,
+        /** The day by which it is packed. */
+        promisedOn: day,
+        shippedOn: day.nullable(),
+        cancelledOn: day.nullable(),
+      })
+      .nullable(),
   })
   .meta({ id: 'Offer' });
 export type Offer = z.infer<typeof offer>;

@@ -32,6 +32,12 @@ export type OrderState = z.infer<typeof orderState>;
 export const awaited = z.enum(['proof', 'deposit', 'tooling'], 'Choose proof, deposit or tooling.');
 export type Awaited = z.infer<typeof awaited>;
 
+/** A promised day that was moved. */
+const promiseMove = z
+  .object({ fromDay: day, toDay: day, why: z.string(), at: instant, by: z.string() })
+  .meta({ id: 'PromiseMove' });
+export type PromiseMove = z.infer<typeof promiseMove>;
+
 export const order = z
   .object({
     id,
@@ -58,6 +64,10 @@ export const order = z
     promisedOn: day,
     takenOnAt: instant,
     shippedOn: day.nullable(),
+    /** How the promised day was moved, the first move first: its `fromDay` is the day that was promised at first. */
+    moves: z.array(promiseMove),
+    /** Who cancelled it, and why. */
+    cancellation: z.object({ at: instant, by: z.string(), why: z.string() }).nullable(),
     job: z.object({
       id,
       number: paperNumber,

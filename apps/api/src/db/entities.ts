@@ -22,7 +22,9 @@ import { Leather } from '../modules/leathers/leather.entity.ts';
 import { CustomerLink } from '../modules/links/customer-link.entity.ts';
 import { Lot } from '../modules/lots/lot.entity.ts';
 import { OutgoingMail } from '../modules/mail/outgoing-mail.entity.ts';
+import { OrderCancellation } from '../modules/orders/order-cancellation.entity.ts';
 import { Order } from '../modules/orders/order.entity.ts';
+import { PromiseMove } from '../modules/orders/promise-move.entity.ts';
 import { PatternVersion } from '../modules/patterns/pattern-version.entity.ts';
 import { Pattern } from '../modules/patterns/pattern.entity.ts';
 import { Payment } from '../modules/payments/payment.entity.ts';
@@ -79,6 +81,8 @@ export const entities = [
   Leather,
   Lot,
   Order,
+  OrderCancellation,
+  PromiseMove,
   OutgoingMail,
   Pattern,
   PatternVersion,

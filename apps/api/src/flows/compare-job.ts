@@ -8,7 +8,7 @@ import {
   type RunFact,
 } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
-import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
+import { findWantedJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
 import { piecesRun, piecesSpoiled } from '../modules/jobs/step-limits.ts';
@@ -19,7 +19,7 @@ import { usedBy, type Used } from './used-by-job.ts';
 
 /** Estimate and fact of a finished job. @throws {Problem} 404, 409 while it is not finished */
 export async function compareFinished({ em }: Work, jobId: number): Promise<JobComparison> {
-  const job = await findJob(em, jobId);
+  const job = await findWantedJob(em, jobId);
   requireJobState(job, 'finished');
   const steps = await stepsOf(em, jobId);
   const used = await usedBy(em, job, steps);

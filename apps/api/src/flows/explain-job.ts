@@ -16,7 +16,7 @@ import {
 } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { moneyText } from '../http/decimal-text.ts';
-import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
+import { findWantedJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
 import { handledAtEnd, stepLimits } from '../modules/jobs/step-limits.ts';
@@ -31,7 +31,7 @@ import { usedBy, type Used } from './used-by-job.ts';
  * @throws {Problem} 404, 409 while it is not finished
  */
 export async function explainJob({ em }: Work, jobId: number): Promise<JobVariances> {
-  const job = await findJob(em, jobId);
+  const job = await findWantedJob(em, jobId);
   requireJobState(job, 'finished');
   const steps = await stepsOf(em, jobId);
   const used = await usedBy(em, job, steps);

@@ -2,7 +2,7 @@ import { Decimal } from 'decimal.js';
 import { scaled } from '../db/columns/scaled-decimal.ts';
 import { invalid } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
-import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
+import { findWantedJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import { piecesRun, piecesSpoiled } from '../modules/jobs/step-limits.ts';
 import { findOrder } from '../modules/orders/find-order.ts';
@@ -30,7 +30,7 @@ export interface Finished {
  * @throws {Problem} 404, 409 when the job is not at the bench or more would come back than was taken, 422
  */
 export async function finishJob(work: Work, jobId: number, finished: Finished): Promise<Job> {
-  const job = await findJob(work.em, jobId);
+  const job = await findWantedJob(work.em, jobId);
   requireJobState(job, 'ready', 'at the bench');
   const steps = await stepsOf(work.em, jobId);
   refuseMoreThanThereIs(job, finished, job.cutCount - piecesSpoiled(steps));

@@ -2,7 +2,7 @@ import { Decimal } from 'decimal.js';
 import { scaled } from '../db/columns/scaled-decimal.ts';
 import { wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
-import { findJob, requireJobState } from '../modules/jobs/find-job.ts';
+import { findJob, findWantedJob, requireJobState } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import { describeItem } from '../modules/stock/described-item.ts';
 import type { StockItem } from '../modules/stock/stock-item.ts';
@@ -16,7 +16,7 @@ import type { Taking } from './take-for-job.ts';
  * @throws {Problem} 404; 409 naming what is free when it is less, or when the job is finished; 422 for another leather
  */
 export async function holdForJob(work: Work, jobId: number, asked: Taking): Promise<Job> {
-  const job = await findJob(work.em, jobId);
+  const job = await findWantedJob(work.em, jobId);
   requireJobState(job, 'waiting', 'ready', 'at the bench', 'paused');
   const [item, quantity]: [StockItem, number] =
     'lotId' in asked

@@ -23,6 +23,18 @@ export async function keepFinished(work: Work, job: Job, order: Order): Promise<
   if (seconds > 0) await keep(work, job, { ...kind, sort: 'seconds' }, [seconds, worth.seconds]);
 }
 
+/** The good pieces of a cancelled order go on the shelf too, at what is left of the cost beside those that lie there. */
+export async function keepPacked(work: Work, job: Job, order: Order): Promise<void> {
+  const quantity = Math.min(job.good, order.quantity);
+  if (quantity === 0) return;
+  const [shelved] = await work.em.execute<[{ value: number }]>(
+    'SELECT COALESCE(SUM(value), 0) AS value FROM finished_movement WHERE job_id = ?',
+    [job.id],
+  );
+  const left = Math.max(0, (await costOf(work, job)) - shelved.value);
+  await keep(work, job, { ...(await kindOf(work, job, order)), sort: 'good' }, [quantity, left]);
+}
+
 /** Leather and hardware that the job took and did not bring back, in hundredths. */
 async function costOf({ em }: Work, job: Job): Promise<number> {
   const { leatherCost, hardwareCost } = await usedBy(em, job, await stepsOf(em, job.id));

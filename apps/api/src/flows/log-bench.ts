@@ -1,7 +1,7 @@
 import { Decimal } from 'decimal.js';
 import { invalid, type FieldFault } from '../http/problem.ts';
 import { BenchLog } from '../modules/jobs/bench-log.entity.ts';
-import { findJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
+import { findWantedJob, requireJobState, stepsOf } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { JobStep } from '../modules/jobs/job-step.entity.ts';
 import { handledIn, stepLimits } from '../modules/jobs/step-limits.ts';
@@ -25,7 +25,7 @@ export interface BenchEntry {
  * @throws {Problem} 404, 409 when the job is not at the bench, 422 when the counts make no sense
  */
 export async function logBench(work: Work, jobId: number, entry: BenchEntry): Promise<Job> {
-  const job = await findJob(work.em, jobId);
+  const job = await findWantedJob(work.em, jobId);
   requireJobState(job, 'ready', 'at the bench');
   const steps = await stepsOf(work.em, jobId);
   const step = steps.find(({ id }) => id === entry.stepId);

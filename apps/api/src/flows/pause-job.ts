@@ -1,5 +1,5 @@
 import { logDeed } from '../modules/activity/activity-log.ts';
-import { findJob, requireJobState } from '../modules/jobs/find-job.ts';
+import { findWantedJob, requireJobState } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import type { Work } from '../work.ts';
 
@@ -20,7 +20,7 @@ interface Change {
 }
 
 async function change(work: Work, jobId: number, { from, to, verb }: Change): Promise<Job> {
-  const job = await findJob(work.em, jobId);
+  const job = await findWantedJob(work.em, jobId);
   requireJobState(job, from);
   job.state = to;
   await work.em.flush();

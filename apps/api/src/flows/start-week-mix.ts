@@ -51,7 +51,7 @@ const finished = `SELECT p.name AS patternName, substr(j.finished_at, 1, 10) AS 
     (SELECT COALESCE(SUM(minutes), 0) FROM job_step WHERE job_id = j.id) AS minutes
   FROM job j JOIN customer_order o ON o.id = j.order_id JOIN quote q ON q.id = o.quote_id
     JOIN pattern_version v ON v.id = j.pattern_version_id JOIN pattern p ON p.id = v.pattern_id
-  WHERE j.state = 'finished' AND p.active = 1 AND j.finished_at >= date(?, ?)
+  WHERE j.state = 'finished' AND o.state <> 'cancelled' AND p.active = 1 AND j.finished_at >= date(?, ?)
   ORDER BY j.finished_at DESC`;
 
 const finishedRuns = ({ em, today }: Work): Promise<Row[]> =>

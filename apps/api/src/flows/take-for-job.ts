@@ -2,7 +2,7 @@ import type { BodyOf, takeForJob as endpoint } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
 import { scaled } from '../db/columns/scaled-decimal.ts';
 import { wrongState } from '../http/problem.ts';
-import { findJob, requireJobState } from '../modules/jobs/find-job.ts';
+import { findWantedJob, requireJobState } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import { describeItem } from '../modules/stock/described-item.ts';
 import { heldForJob } from '../modules/stock/held-for-job.ts';
@@ -26,7 +26,7 @@ export async function takeForJob(
   jobId: number,
   taking: BodyOf<typeof endpoint>,
 ): Promise<Job> {
-  const job = await findJob(work.em, jobId);
+  const job = await findWantedJob(work.em, jobId);
   requireJobState(job, 'ready', 'at the bench');
   const reason = `for ${job.number}`;
   if ('lotId' in taking) {

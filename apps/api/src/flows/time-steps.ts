@@ -76,8 +76,8 @@ async function loggedFor({ em }: Pick<Work, 'em'>, patternId: number): Promise<L
   const rows = await em.execute<LogRow[]>(
     `SELECT s.name AS step_name, l.good + l.rejects + l.seconds AS units, l.minutes, j.number, l.at, l.person_name
     FROM bench_log l JOIN job_step s ON s.id = l.job_step_id JOIN job j ON j.id = s.job_id
-      JOIN pattern_version v ON v.id = j.pattern_version_id
-    WHERE v.pattern_id = ? AND l.minutes > 0 AND l.good + l.rejects + l.seconds > 0
+      JOIN pattern_version v ON v.id = j.pattern_version_id JOIN customer_order o ON o.id = j.order_id
+    WHERE v.pattern_id = ? AND o.state <> 'cancelled' AND l.minutes > 0 AND l.good + l.rejects + l.seconds > 0
     ORDER BY l.id DESC LIMIT 200`,
     [patternId],
   );

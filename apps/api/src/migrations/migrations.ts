@@ -16,6 +16,7 @@ import { TheServices } from './migration-20261205-the-services.ts';
 import { TheWeights } from './migration-20261206-the-weights.ts';
 import { TheShelfSales } from './migration-20261207-the-shelf-sales.ts';
 import { TheDays } from './migration-20261208-the-days.ts';
+import { TheChangedOrders } from './migration-20261209-the-changed-orders.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -37,4 +38,5 @@ export const migrations = [
   { name: 'migration-20261206-the-weights', class: TheWeights },
   { name: 'migration-20261207-the-shelf-sales', class: TheShelfSales },
   { name: 'migration-20261208-the-days', class: TheDays },
+  { name: 'migration-20261209-the-changed-orders', class: TheChangedOrders },
 ];

@@ -5,6 +5,7 @@ import { bookRules } from './book-rules.ts';
 import { buyingRules } from './buying-rules.ts';
 import { fileRules } from './file-rules.ts';
 import { itemRules } from './item-rules.ts';
+import { orderRules } from './order-rules.ts';
 import { quoteRules } from './quote-rules.ts';
 import type { Query } from './rule.ts';
 import { shelfRules } from './shelf-rules.ts';
@@ -21,6 +22,7 @@ const rules = [
   ...stockRules,
   ...buyingRules,
   ...quoteRules,
+  ...orderRules,
   ...workRules,
   ...bookRules,
   ...itemRules,

@@ -1,5 +1,5 @@
 import type { Decimal } from 'decimal.js';
-import type { EntityManager } from '@mikro-orm/sqlite';
+import type { EntityManager, FilterQuery } from '@mikro-orm/sqlite';
 import { minutesPer100, unusualRuns, type Unusual } from '@hidewright/domain';
 import { Customer } from '../../modules/customers/customer.entity.ts';
 import { Job } from '../../modules/jobs/job.entity.ts';
@@ -33,7 +33,7 @@ export interface PastRun {
 
 /**
  * The last finished jobs of a pattern, newest first, whichever version they were made by: of one customer, or, where
- * it is null, of all.
+ * it is null, of all. What was cancelled says nothing of a run that was wanted.
  */
 export async function pastRuns(
   em: EntityManager,
@@ -47,7 +47,8 @@ export async function pastRuns(
     {
       patternVersionId: { $in: [...numbers.keys()] },
       state: 'finished',
-      ...(customerId !== null && { orderId: { $in: await ordersOf(em, customerId) } }),
+      orderId: { $nin: await idsOf(em, { state: 'cancelled' }) },
+      ...(customerId !== null && { $and: [{ orderId: { $in: await idsOf(em, { customerId }) } }] }),
     },
     { orderBy: { finishedAt: 'desc', id: 'desc' }, limit: mostRuns },
   );
@@ -67,8 +68,8 @@ export async function pastRuns(
   return withUnusual(runs);
 }
 
-async function ordersOf(em: EntityManager, customerId: number): Promise<number[]> {
-  const orders = await em.find(Order, { customerId }, { fields: ['id'] });
+async function idsOf(em: EntityManager, where: FilterQuery<Order>): Promise<number[]> {
+  const orders = await em.find(Order, where, { fields: ['id'] });
   return orders.map(({ id }) => id);
 }
 
@@ -82,7 +83,7 @@ export async function customersOf(
       JOIN pattern_version ON pattern_version.id = job.pattern_version_id
       JOIN customer_order ON customer_order.id = job.order_id
       JOIN customer ON customer.id = customer_order.customer_id
-      WHERE pattern_version.pattern_id = ? AND job.state = 'finished'
+      WHERE pattern_version.pattern_id = ? AND job.state = 'finished' AND customer_order.state <> 'cancelled'
       GROUP BY customer.id ORDER BY runs DESC, customer.name`,
     [patternId],
   );

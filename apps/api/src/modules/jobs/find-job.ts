@@ -10,6 +10,37 @@ export async function findJob(em: EntityManager, id: number): Promise<Job> {
   return job;
 }
 
+/** Whether the order that a job is for was cancelled. */
+export async function isCancelled(
+  em: EntityManager,
+  { orderId }: Pick<Job, 'orderId'>,
+): Promise<boolean> {
+  return (await orderOf(em, orderId)).state === 'cancelled';
+}
+
+/** A job that somebody still wants. @throws {Problem} 404; 409 when its order was cancelled */
+export async function findWantedJob(em: EntityManager, id: number): Promise<Job> {
+  const job = await findJob(em, id);
+  const order = await orderOf(em, job.orderId);
+  if (order.state !== 'cancelled') return job;
+  const back = job.state === 'finished' ? '' : ' What it has taken can still be brought back.';
+  throw wrongState(
+    `${order.number} was cancelled, so ${job.number} is over: nothing more is taken, logged, finished or compared.${back}`,
+    back === '' ? [] : ['bring back what was taken', 'put an offcut back'],
+  );
+}
+
+async function orderOf(
+  em: EntityManager,
+  orderId: number,
+): Promise<{ number: string; state: string }> {
+  const [order] = await em.execute<[{ number: string; state: string }]>(
+    'SELECT number, state FROM customer_order WHERE id = ?',
+    [orderId],
+  );
+  return order;
+}
+
 /** A job's steps, in the order of the work. */
 export function stepsOf(em: EntityManager, jobId: number): Promise<JobStep[]> {
   return em.find(JobStep, { jobId }, { orderBy: { position: 'asc' } });

@@ -10,6 +10,7 @@ interface JobRow {
   number: string;
   state: JobState;
   order_id: number;
+  cancelled: number;
   title: string;
   customer_name: string;
   quantity: number;
@@ -31,6 +32,9 @@ export interface JobFilter {
   open: boolean | undefined;
 }
 
+/** Nothing more is made of it. */
+const over = `(j.state = 'finished' OR o.state = 'cancelled')`;
+
 /** Jobs, newest first, one more than the limit where there are more. */
 export async function findJobs(em: EntityManager, filter: JobFilter): Promise<JobCard[]> {
   const conditions = ['1 = 1'];
@@ -40,9 +44,8 @@ export async function findJobs(em: EntityManager, filter: JobFilter): Promise<Jo
     values.push(...given);
   };
   if (filter.below !== undefined) where('j.id < ?', filter.below);
-  if (filter.state !== undefined) where('j.state = ?', filter.state);
-  if (filter.open !== undefined)
-    where(filter.open ? `j.state <> 'finished'` : `j.state = 'finished'`);
+  if (filter.state !== undefined) where(`j.state = ? AND o.state <> 'cancelled'`, filter.state);
+  if (filter.open !== undefined) where(filter.open ? `NOT ${over}` : over);
   if (filter.q !== undefined) {
     const like = `%${filter.q}%`;
     where(
@@ -54,7 +57,7 @@ export async function findJobs(em: EntityManager, filter: JobFilter): Promise<Jo
     );
   }
   const rows = await em.execute<JobRow[]>(
-    `SELECT j.id, j.number, j.state, j.order_id, o.title, c.name AS customer_name, j.quantity, j.cut_count, j.containers,
+    `SELECT j.id, j.number, j.state, j.order_id, o.state = 'cancelled' AS cancelled, o.title, c.name AS customer_name, j.quantity, j.cut_count, j.containers,
       o.promised_on, o.in_hands_on, o.awaits, j.planned_minutes, j.good, j.seconds
     FROM job j JOIN customer_order o ON o.id = j.order_id JOIN customer c ON c.id = o.customer_id
     WHERE ${conditions.join(' AND ')} ORDER BY j.id DESC LIMIT ?`,
@@ -81,6 +84,7 @@ function toCard(row: JobRow, steps: JobStep[]): JobCard {
     number: row.number,
     state: row.state,
     orderId: row.order_id,
+    cancelled: row.cancelled === 1,
     title: row.title,
     customerName: row.customer_name,
     quantity: row.quantity,

@@ -11,6 +11,7 @@ import {
   readJob,
   readVariances,
   resumeJob as resumeJobEndpoint,
+  returnFromJob as returnFromJobEndpoint,
   takeForJob as takeForJobEndpoint,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
@@ -21,6 +22,7 @@ import { holdForJob, letGoForJob } from '../../flows/hold-for-job.ts';
 import { logBench } from '../../flows/log-bench.ts';
 import { pauseJob, resumeJob } from '../../flows/pause-job.ts';
 import { planBench } from '../../flows/plan-bench.ts';
+import { returnFromJob } from '../../flows/return-from-job.ts';
 import { takeForJob } from '../../flows/take-for-job.ts';
 import { readTicket } from '../../flows/ticket/read-ticket.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
@@ -56,6 +58,11 @@ export function jobRoutes(context: Context): Router {
 
   serve(router, context, letGo, async (work, { params, body }) => {
     await letGoForJob(work, params.id, body);
+    return readTicket(work.em, params.id);
+  });
+
+  serve(router, context, returnFromJobEndpoint, async (work, { params, body }) => {
+    await returnFromJob(work, params.id, body);
     return readTicket(work.em, params.id);
   });
 

@@ -52,6 +52,29 @@ export async function offerOf(work: Work, quoteId: number): Promise<Offer> {
     agreedQuantity: quote.agreedQuantity,
     agreedOption: quote.agreedOption,
     agreedOn: quote.agreedAt === null ? null : dayIn(workshop.timeZone, new Date(quote.agreedAt)),
+    order: await orderOf(work, quoteId, workshop.timeZone),
+  };
+}
+
+interface OrderRow {
+  number: string;
+  promised_on: string;
+  shipped_on: string | null;
+  cancelled_at: string | null;
+}
+
+async function orderOf({ em }: Work, quoteId: number, zone: string): Promise<Offer['order']> {
+  const [row] = await em.execute<OrderRow[]>(
+    `SELECT o.number, o.promised_on, o.shipped_on, c.at AS cancelled_at FROM customer_order o
+       LEFT JOIN order_cancellation c ON c.order_id = o.id WHERE o.quote_id = ?`,
+    [quoteId],
+  );
+  if (row === undefined) return null;
+  return {
+    number: row.number,
+    promisedOn: row.promised_on,
+    shippedOn: row.shipped_on,
+    cancelledOn: row.cancelled_at === null ? null : dayIn(zone, new Date(row.cancelled_at)),
   };
 }
 

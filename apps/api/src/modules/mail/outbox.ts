@@ -8,7 +8,7 @@ export interface NewMail {
   subject: string;
   body: string;
   attachments: { name: string; hash: string; type: string }[];
-  subjectKind: 'quote' | 'invoice' | 'purchase order';
+  subjectKind: 'quote' | 'order' | 'invoice' | 'purchase order';
   subjectId: number;
 }
 

@@ -36,13 +36,19 @@ interface OrderRow {
   invoice_id: number | null;
   invoice_number: string | null;
   invoice_state: string | null;
+  moves: string;
+  cancellation: string | null;
   version: number;
 }
 
 const joined = `
   SELECT o.*, q.number AS quote_number, c.name AS customer_name, p.id AS pattern_id, p.name AS pattern_name,
     j.id AS job_id, j.number AS job_number, j.state AS job_state, j.cut_count, j.good, j.seconds,
-    i.id AS invoice_id, i.number AS invoice_number, i.state AS invoice_state
+    i.id AS invoice_id, i.number AS invoice_number, i.state AS invoice_state,
+    (SELECT json_group_array(json_object('fromDay', from_day, 'toDay', to_day, 'why', why, 'at', at, 'by', actor_name))
+      FROM (SELECT * FROM promise_move WHERE order_id = o.id ORDER BY id)) AS moves,
+    (SELECT json_object('at', at, 'by', actor_name, 'why', why) FROM order_cancellation WHERE order_id = o.id)
+      AS cancellation
   FROM customer_order o
   JOIN quote q ON q.id = o.quote_id
   JOIN customer c ON c.id = o.customer_id
@@ -121,6 +127,9 @@ function toReply(row: OrderRow): Order {
     promisedOn: row.promised_on,
     takenOnAt: row.taken_on_at,
     shippedOn: row.shipped_on,
+    moves: JSON.parse(row.moves) as Order['moves'],
+    cancellation:
+      row.cancellation === null ? null : (JSON.parse(row.cancellation) as Order['cancellation']),
     job: {
       id: row.job_id,
       number: row.job_number,

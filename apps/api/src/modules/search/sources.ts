@@ -32,7 +32,8 @@ const sources: Source[] = [
   {
     kind: 'job',
     roles: everybody,
-    sql: `SELECT j.id AS key, j.number || ' · ' || o.title AS label, j.state AS detail
+    sql: `SELECT j.id AS key, j.number || ' · ' || o.title AS label,
+        CASE o.state WHEN 'cancelled' THEN 'cancelled' ELSE j.state END AS detail
       FROM job j JOIN customer_order o ON o.id = j.order_id
       WHERE j.number LIKE ? ESCAPE '\\' OR o.title LIKE ? ESCAPE '\\' ORDER BY j.id DESC LIMIT 5`,
     to: (key) => `/bench/jobs/${key}`,

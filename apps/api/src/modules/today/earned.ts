@@ -21,7 +21,7 @@ const finished = `SELECT j.number, o.title, substr(j.finished_at, 1, 10) AS fini
     q.numbers,
     (SELECT SUM(minutes) FROM job_step WHERE job_id = j.id) AS minutes
   FROM job j JOIN customer_order o ON o.id = j.order_id JOIN quote q ON q.id = o.quote_id
-  WHERE j.state = 'finished' ORDER BY j.finished_at DESC LIMIT 12`;
+  WHERE j.state = 'finished' AND o.state <> 'cancelled' ORDER BY j.finished_at DESC LIMIT 12`;
 
 /** What an hour left on the latest finished runs: what was bought as quoted, the hours as logged. */
 export async function earned(work: Work): Promise<NonNullable<Today['earned']>> {

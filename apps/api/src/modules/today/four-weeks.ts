@@ -18,7 +18,7 @@ interface Row {
 const openJobs = `SELECT j.id, j.number, o.title, c.name AS customer, j.state, o.promised_on, o.in_hands_on,
     j.planned_minutes AS planned, (SELECT COALESCE(SUM(minutes), 0) FROM job_step WHERE job_id = j.id) AS logged
   FROM job j JOIN customer_order o ON o.id = j.order_id JOIN customer c ON c.id = o.customer_id
-  WHERE j.state <> 'finished' ORDER BY o.promised_on, j.id`;
+  WHERE j.state <> 'finished' AND o.state <> 'cancelled' ORDER BY o.promised_on, j.id`;
 
 /** The open jobs over four weeks, worked off one after the other in the order in which they are promised. */
 export async function fourWeeks(work: Work): Promise<NonNullable<Today['fourWeeks']>> {

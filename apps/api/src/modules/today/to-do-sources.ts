@@ -63,7 +63,7 @@ export const sources: Source[] = [
     roles: ['maker'],
     sql: `SELECT j.id, j.number, o.title, c.name AS customer, o.promised_on AS day, j.state AS extra
       FROM job j JOIN customer_order o ON o.id = j.order_id JOIN customer c ON c.id = o.customer_id
-      WHERE j.state IN ('at the bench', 'ready', 'paused')
+      WHERE j.state IN ('at the bench', 'ready', 'paused') AND o.state <> 'cancelled'
       ORDER BY CASE j.state WHEN 'at the bench' THEN 0 ELSE 1 END, o.promised_on, j.id LIMIT 6`,
     say: (row, today) => ({
       kind: 'make',
