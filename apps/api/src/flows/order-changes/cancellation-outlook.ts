@@ -53,7 +53,7 @@ interface Amount {
 const heldBy = ({ em }: Work, jobId: number): Promise<Amount[]> =>
   em.execute(
     `SELECT lot_id, hardware_id, SUM(open) AS quantity FROM reservation WHERE job_id = ? AND open > 0
-     GROUP BY lot_id, hardware_id ORDER BY lot_id IS NULL, lot_id, hardware_id`,
+     GROUP BY lot_id, hardware_id ORDER BY hardware_id, lot_id`,
     [jobId],
   );
 
@@ -62,7 +62,7 @@ const takenFor = ({ em }: Work, jobId: number): Promise<Amount[]> =>
   em.execute(
     `SELECT COALESCE(from_lot_id, lot_id) AS lot_id, hardware_id, -SUM(quantity) AS quantity
      FROM stock_movement WHERE job_id = ? GROUP BY COALESCE(from_lot_id, lot_id), hardware_id
-     HAVING SUM(quantity) < 0 ORDER BY 1 IS NULL, 1, hardware_id`,
+     HAVING SUM(quantity) < 0 ORDER BY hardware_id, COALESCE(from_lot_id, lot_id)`,
     [jobId],
   );
 

@@ -21,7 +21,7 @@ export async function whyNotCancelled(
   if (state === 'cancelled') return { because: `${number} is cancelled already.`, allowed: [] };
   if (state === 'part shipped' || state === 'shipped' || state === 'closed')
     return {
-      because: `Something of ${number} has left the shop already, so it cannot be cancelled. Agree with the customer what comes back, and credit its invoice.`,
+      because: `Something of ${number} has left the shop already, so it cannot be cancelled. Agree with the customer what comes back, and what it is worth.`,
       allowed: allowedFor(state),
     };
   const [invoice] = await em.execute<InvoiceRow[]>(
@@ -38,7 +38,7 @@ function billed(order: string, { number, state }: InvoiceRow): Refusal {
       allowed: ['discard the draft invoice'],
     };
   return {
-    because: `${order} was invoiced as ${number}. Credit that invoice in full first, then cancel the order.`,
-    allowed: [`credit ${number}`],
+    because: `${order} was invoiced as ${number}. It can be cancelled once ${number} is credited in full: settle that with the bookkeeper first.`,
+    allowed: [],
   };
 }

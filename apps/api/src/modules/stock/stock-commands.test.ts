@@ -170,6 +170,19 @@ const commands = {
     await send('maker', `/jobs/${pick(jobIds, command.a)}/takings`, amount(command));
     return 'maker';
   },
+  bringBack: async (command: Command): Promise<Role> => {
+    await send('maker', `/jobs/${pick(jobIds, command.a)}/returns`, amount(command));
+    return 'maker';
+  },
+  cancel: async ({ a, b }: Command): Promise<Role> => {
+    // Seldom, or there would be little left to do.
+    if (b % 4 > 0) return 'owner';
+    const job = (await ready.shop.as('maker').get(`/api/jobs/${pick(jobIds, a)}`)).body as Job;
+    const path = `/orders/${job.orderId}/cancellation`;
+    const { seen } = (await ready.shop.as('owner').get(`/api${path}`)).body as { seen: string };
+    await send('owner', path, { why: 'not wanted', seen });
+    return 'owner';
+  },
   adjust: async ({ b, much }: Command): Promise<Role> => {
     const set =
       b % 2 === 0
@@ -221,8 +234,8 @@ const commands = {
   takeOn: async ({ a }: Command): Promise<Role> => {
     const at = a % jobIds.length;
     const job = (await ready.shop.as('maker').get(`/api/jobs/${jobIds[at]}`)).body as Job;
-    // A place at the bench is given out again once its job is finished.
-    if (job.state === 'finished')
+    // A place at the bench is given out again once its job is over.
+    if (job.state === 'finished' || job.orderState === 'cancelled')
       jobIds[at] = (await takenOn(ready, 50, { evenIfShort: true })).job.id;
     return 'owner';
   },
