@@ -47,7 +47,9 @@ const openNow = `SELECT j.id, j.number, o.title, o.promised_on, j.estimate
 
 const openThen = `SELECT j.id, j.number, o.title, o.promised_on, j.estimate
   FROM job j JOIN customer_order o ON o.id = j.order_id
-  WHERE o.taken_on_at < :over AND (j.finished_at IS NULL OR j.finished_at >= :over) ORDER BY o.promised_on, j.id`;
+  WHERE o.taken_on_at < :over AND (j.finished_at IS NULL OR j.finished_at >= :over)
+    AND NOT EXISTS (SELECT 1 FROM order_cancellation c WHERE c.order_id = o.id AND c.at < :over)
+  ORDER BY o.promised_on, j.id`;
 
 const heldNow = `SELECT job_id, lot_id, hardware_id, open AS quantity FROM reservation WHERE open > 0`;
 const heldThen = `SELECT r.job_id, r.lot_id, r.hardware_id, m.quantity
