@@ -1,4 +1,9 @@
-import { listOrders, readOrder } from '@hidewright/contract';
+import {
+  listOrders,
+  readCancellationOutlook,
+  readOrder,
+  readPromiseOutlook,
+} from '@hidewright/contract';
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
@@ -24,5 +29,23 @@ export function orderQuery(id: number) {
   return queryOptions({
     queryKey: ['orders', id],
     queryFn: ({ signal }) => call(readOrder, { params: { id }, signal }),
+  });
+}
+
+/** What cancelling would do, as it stands when it is asked. */
+export function cancellationQuery(id: number) {
+  return queryOptions({
+    queryKey: ['orders', id, 'cancellation'],
+    queryFn: ({ signal }) => call(readCancellationOutlook, { params: { id }, signal }),
+    staleTime: 0,
+  });
+}
+
+/** Whether the bench can keep another day. */
+export function promiseQuery(id: number, by: string) {
+  return queryOptions({
+    queryKey: ['orders', id, 'promise', by],
+    queryFn: ({ signal }) => call(readPromiseOutlook, { params: { id }, query: { by }, signal }),
+    retry: false,
   });
 }

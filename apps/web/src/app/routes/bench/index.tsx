@@ -84,7 +84,7 @@ function Finished({ jobs }: { jobs: readonly JobCard[] }) {
   return (
     <details>
       <summary className="mb-2 min-h-11 py-2 font-semibold">
-        Finished lately ({jobs.length})
+        Finished or cancelled lately ({jobs.length})
       </summary>
       <JobTickets title="Finished" jobs={jobs} />
     </details>

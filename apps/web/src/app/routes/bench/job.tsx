@@ -33,7 +33,8 @@ export function Component() {
   const { data: job } = useSuspenseQuery(jobQuery(id));
   const { data: session } = useSuspenseQuery(sessionQuery());
   const outbox = useLogOutbox(session.person?.email ?? '');
-  const canLog = job.state === 'ready' || job.state === 'at the bench';
+  const cancelled = job.orderState === 'cancelled';
+  const canLog = !cancelled && (job.state === 'ready' || job.state === 'at the bench');
   return (
     <>
       <WaitingMark count={outbox.waiting.length} />
@@ -42,7 +43,7 @@ export function Component() {
       <StateNotice job={job} />
       <div className="mt-4 grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)] print:block">
         <div className="space-y-5 print:hidden">
-          {job.state === 'finished' && (
+          {job.state === 'finished' && !cancelled && (
             <>
               <Compared id={job.id} />
               <LearnedCard patternId={job.patternId} isOwner={session.person?.role === 'owner'} />
@@ -63,7 +64,7 @@ export function Component() {
               <ShipForm order={{ id: job.orderId, number: job.orderNumber }} />
             </div>
           )}
-          {job.state !== 'finished' && (
+          {job.state !== 'finished' && !cancelled && (
             <div className="empty:hidden print:hidden">
               <LastTimeCard of="order" id={job.orderId} />
             </div>
@@ -106,6 +107,7 @@ function TicketActions({ job }: { job: Job }) {
 }
 
 function StateNotice({ job }: { job: Job }) {
+  if (job.orderState === 'cancelled') return <CancelledTicket job={job} />;
   if (job.state === 'waiting') {
     return (
       <Notice tone="attention" className="mt-4" title="Not yet:">
@@ -117,6 +119,19 @@ function StateNotice({ job }: { job: Job }) {
   return (
     <Notice tone="attention" className="mt-4" title="Paused.">
       Resume it to log or take anything.
+    </Notice>
+  );
+}
+
+function CancelledTicket({ job }: { job: Job }) {
+  const taken =
+    job.state !== 'finished' &&
+    (job.lots.some(({ takenAreaMm2 }) => takenAreaMm2 !== '0') ||
+      job.hardware.some((item) => item.taken > 0));
+  return (
+    <Notice tone="attention" className="mt-4" title={`${job.orderNumber} was cancelled.`}>
+      Nothing more is made of it.
+      {taken && ' Bring back what was taken and can be used; the rest stays spent.'}
     </Notice>
   );
 }

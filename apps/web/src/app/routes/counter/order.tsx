@@ -9,6 +9,10 @@ import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { CutFromCard } from '../../../features/lots/components/cut-from-card.tsx';
 import { Arrivals } from '../../../features/orders/components/arrivals.tsx';
+import { CancelOrder } from '../../../features/orders/components/cancel-order.tsx';
+import { CancelledNotice } from '../../../features/orders/components/cancelled-notice.tsx';
+import { ChangesCard } from '../../../features/orders/components/changes-card.tsx';
+import { MoveDay } from '../../../features/orders/components/move-day.tsx';
 import { OrderFigures } from '../../../features/orders/components/order-figures.tsx';
 import { OrderTicket } from '../../../features/orders/components/order-ticket.tsx';
 import { ShipForm } from '../../../features/orders/components/ship-form.tsx';
@@ -28,12 +32,33 @@ export function Component() {
   const role = session.person?.role;
   return (
     <div className="space-y-5">
-      <OrderTicket order={order} actions={role !== 'maker' && <InvoiceAction order={order} />} />
+      <OrderTicket
+        order={order}
+        actions={
+          <>
+            {role !== 'maker' && <InvoiceAction order={order} />}
+            {role === 'owner' && <ChangeActions order={order} />}
+          </>
+        }
+      />
+      <CancelledNotice
+        order={order}
+        actions={
+          role === 'owner' && (
+            <LinkButton
+              to={`/counter/quotes/new?customer=${order.customerId}&pattern=${order.patternId}`}
+            >
+              Write another quote
+            </LinkButton>
+          )
+        }
+      />
       <div className="grid items-start gap-5 lg:grid-cols-2">
         <Arrivals order={order} canNote={role === 'owner'} />
         <JobCard order={order} canOpen={role !== 'bookkeeper'} />
         <CutFromCard orderId={order.id} mayOpenOrders={role !== 'bookkeeper'} />
         <OrderFigures order={order} />
+        <ChangesCard order={order} />
         {order.state === 'packed' && role !== 'bookkeeper' && <ShipForm order={order} />}
         <Card title="Where it comes from">
           <p>
@@ -46,6 +71,17 @@ export function Component() {
         </Card>
       </div>
     </div>
+  );
+}
+
+/** As long as something of it is still to come. */
+function ChangeActions({ order }: { order: Order }) {
+  if (['shipped', 'closed', 'cancelled'].includes(order.state)) return null;
+  return (
+    <>
+      <MoveDay order={order} />
+      {order.state !== 'part shipped' && <CancelOrder order={order} />}
+    </>
   );
 }
 
@@ -75,7 +111,10 @@ function JobCard({ order, canOpen }: { order: Order; canOpen: boolean }) {
     >
       <KeyFigures
         figures={[
-          { word: 'State', figure: <StateMark state={job.state} /> },
+          {
+            word: 'State',
+            figure: <StateMark state={order.state === 'cancelled' ? 'cancelled' : job.state} />,
+          },
           { word: 'To cut', figure: countText(job.cutCount) },
           ...(job.state === 'finished'
             ? [

@@ -35,7 +35,7 @@ export function JobTickets({ title, jobs }: JobTicketsProps) {
 
 function JobTicket({ job }: { job: JobCard }) {
   const { today } = useWorkshop();
-  const isOver = job.state === 'finished';
+  const isOver = job.state === 'finished' || job.cancelled;
   return (
     <Ticket
       number={job.number}
@@ -51,7 +51,12 @@ function JobTicket({ job }: { job: JobCard }) {
             </TicketFact>
           )}
           {job.awaits.length > 0 && <TicketFact word="Awaits">{job.awaits.join(', ')}</TicketFact>}
-          {isOver ? (
+          {job.cancelled && (
+            <TicketFact word="State">
+              <StateMark state="cancelled" />
+            </TicketFact>
+          )}
+          {job.state === 'finished' ? (
             <TicketFact word="Good">{countText(job.good)}</TicketFact>
           ) : (
             <TicketFact word="Minutes">{`${minutesText(job.loggedMinutes)} of ${minutesText(job.plannedMinutes)}`}</TicketFact>
@@ -73,7 +78,7 @@ const verbs: Partial<Record<JobCard['state'], string>> = {
 
 function Act({ job }: { job: JobCard }) {
   const verb = verbs[job.state];
-  if (verb === undefined) return null;
+  if (verb === undefined || job.cancelled) return null;
   return (
     <LinkButton
       to={`/bench/jobs/${job.id}`}

@@ -7,6 +7,7 @@ export function PauseButton({ job }: { job: Job }) {
   const pause = usePauseJob();
   const resume = useResumeJob();
   const input = { params: { id: job.id }, body: {} };
+  if (job.orderState === 'cancelled') return null;
   if (job.state === 'at the bench') {
     return (
       <Button className="min-h-11" busy={pause.isPending} onClick={() => pause.mutate(input)}>

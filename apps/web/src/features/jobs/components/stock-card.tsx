@@ -14,6 +14,7 @@ import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
 import { jobQuery } from '../jobs.queries.ts';
 import { standsInText } from '../stand-in-words.ts';
+import { BringHardwareBack, BringLeatherBack } from './bring-back.tsx';
 import { MixNotice } from './mix-notice.tsx';
 import { OffcutBack } from './offcut-back.tsx';
 import { TakeOther } from './take-other.tsx';
@@ -26,6 +27,8 @@ interface StockCardProps {
 /** Leather and hardware of a job: what is held for it, what it has taken, and one press to take what is held. */
 export function StockCard({ job, canTake }: StockCardProps) {
   const workshop = useWorkshop();
+  const cancelled = job.orderState === 'cancelled';
+  const givesBack = atWork.has(job.state) || (cancelled && job.state !== 'finished');
   const client = useQueryClient();
   const { mutate, isPending, error: notTaken, variables } = useTakeForJob();
   const take = (body: Parameters<typeof mutate>[0]['body'], sentence: string) =>
@@ -69,8 +72,11 @@ export function StockCard({ job, canTake }: StockCardProps) {
             detail={lotLine(lot, (mm2) => rackAreaText(mm2, workshop))}
           >
             {canTake && lot.heldAreaMm2 !== '0' && <MixNotice lot={lot} />}
-            {cutsOff.has(job.state) && lot.takenAreaMm2 !== '0' && (
-              <OffcutBack job={job} lot={lot} />
+            {givesBack && lot.takenAreaMm2 !== '0' && (
+              <>
+                <BringLeatherBack job={job} lot={lot} />
+                <OffcutBack job={job} lot={lot} />
+              </>
             )}
             {job.state !== 'finished' && lot.heldAreaMm2 !== '0' && (
               <LetGo
@@ -117,6 +123,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
               title={<strong>{item.name}</strong>}
               detail={hardwareLine(item)}
             >
+              {givesBack && item.taken > 0 && <BringHardwareBack job={job} item={item} />}
               {job.state !== 'finished' && item.held > 0 && (
                 <LetGo
                   busy={
@@ -149,13 +156,13 @@ export function StockCard({ job, canTake }: StockCardProps) {
           ))}
         </ul>
       )}
-      {job.state !== 'finished' && <TakeOther job={job} canTake={canTake} />}
+      {job.state !== 'finished' && !cancelled && <TakeOther job={job} canTake={canTake} />}
     </Card>
   );
 }
 
-/** When what was taken is on the bench, and may come off it in part. */
-const cutsOff: ReadonlySet<Job['state']> = new Set(['at the bench', 'paused']);
+/** When what was taken is on the bench, and may come off it. */
+const atWork: ReadonlySet<Job['state']> = new Set(['at the bench', 'paused']);
 
 const lotKey = 'lotId' as never;
 const hardwareKey = 'hardwareId' as never;

@@ -22,7 +22,10 @@ export function TicketHead({ job, actions }: { job: Job; actions?: ReactNode }) 
         detail={`${countText(job.quantity)} for ${job.customerName} · pack by ${dayText(job.promisedOn, today)}${inHands}`}
         actions={
           <>
-            <StateMark state={job.state} className="self-center" />
+            <StateMark
+              state={job.orderState === 'cancelled' ? 'cancelled' : job.state}
+              className="self-center"
+            />
             {actions}
           </>
         }

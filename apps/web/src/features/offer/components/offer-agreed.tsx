@@ -35,8 +35,24 @@ export function OfferAgreed({ offer }: { offer: Offer }) {
       <dl>
         <Line word={`together, in ${offer.currency}`} amount={rung.total} strong />
       </dl>
-      <p className="mt-3">{`${offer.shopName} has your answer and will confirm the day to you.`}</p>
+      <WhatBecameOfIt offer={offer} />
     </section>
+  );
+}
+
+/** The day that is promised now, or how it ended. */
+function WhatBecameOfIt({ offer: { order, shopName } }: { offer: Offer }) {
+  if (order === null)
+    return <p className="mt-3">{`${shopName} has your answer and will confirm the day to you.`}</p>;
+  if (order.shippedOn !== null)
+    return (
+      <p className="mt-3">{`Order ${order.number} left ${shopName} on ${longDayText(order.shippedOn)}.`}</p>
+    );
+  return (
+    <p className="mt-3">
+      {`Order ${order.number}: packed by `}
+      <strong className="font-semibold">{longDayText(order.promisedOn)}</strong>.
+    </p>
   );
 }
 

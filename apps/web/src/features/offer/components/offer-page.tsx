@@ -39,6 +39,12 @@ export function OfferPage({ offer, token }: { offer: Offer; token: string }) {
 }
 
 function OfferAnswer({ offer, token }: { offer: Offer; token: string }) {
+  if (offer.order?.cancelledOn)
+    return (
+      <Notice tone="attention" title={`Order ${offer.order.number} is cancelled.`}>
+        {`It was called off on ${longDayText(offer.order.cancelledOn)}, and nothing more is made for it. Ask ${offer.shopName} for a new quote.`}
+      </Notice>
+    );
   if (offer.state === 'agreed') return <OfferAgreed offer={offer} />;
   if (offer.state === 'declined') {
     return (

@@ -26,6 +26,11 @@ export function OrderTicket({ order, actions }: { order: Order; actions?: ReactN
               </span>
             </TicketFact>
             <TicketFact word="Promised">{dayText(order.promisedOn, today)}</TicketFact>
+            {order.moves[0] !== undefined && (
+              <TicketFact word="Promised first">
+                {dayText(order.moves[0].fromDay, today)}
+              </TicketFact>
+            )}
             {order.inHandsOn !== null && (
               <TicketFact word="In hands">{dayText(order.inHandsOn, today)}</TicketFact>
             )}
