@@ -158,7 +158,10 @@ export const purchaseOrder = z
     state: z.enum(purchaseOrderStates),
     createdAt: z.string(),
     sentAt: z.string().nullable(),
+    /** Of a draft, the day that was chosen for it, if any; once sent, the day that its supplier was told. */
     expectedOn: z.string().nullable(),
+    /** Of a draft, the day on which it would be here if it were sent today; null once it is sent. */
+    arrivesOn: z.string().nullable(),
     /** The day on which the next of what is still to come is awaited; null where nothing is. */
     awaitedOn: z.string().nullable(),
     note: z.string(),

@@ -87,10 +87,10 @@ async function putOnDraft(
     await changeDraft(work, draft, { lines });
     return draft.id;
   }
-  const days = wanted.flatMap(({ item }) => item.sold.arrivesOn ?? []).sort();
   const made = await draftPurchaseOrder(work, {
     supplierId,
-    expectedOn: days.at(-1) ?? null,
+    // Worked out when it is sent, from whatever is on it by then.
+    expectedOn: null,
     note: '',
     lines: wanted.reduce(withWanted, []),
   });

@@ -18,7 +18,6 @@ interface Drafted {
 interface ToDraft {
   line: PurchaseLineTyped;
   supplierId: number;
-  arrivesOn: string | null;
   runs: CheckedRun[];
 }
 
@@ -36,20 +35,20 @@ export async function draftWhatIsShort(work: Work, checked: CheckedRuns): Promis
 }
 
 function toDraft({ buying, toBuy, runs, ...thing }: Lacking): ToDraft[] {
-  const { supplierId, arrivesOn, terms } = buying;
+  const { supplierId, terms } = buying;
   if (toBuy === null || supplierId === null) return [];
-  return [{ line: boughtLine(thing, terms, toBuy.quantity), supplierId, arrivesOn, runs }];
+  return [{ line: boughtLine(thing, terms, toBuy.quantity), supplierId, runs }];
 }
 
 async function draftEach(work: Work, all: readonly ToDraft[]): Promise<PurchaseOrder[]> {
   const orders: PurchaseOrder[] = [];
   for (const supplierId of new Set(all.map((each) => each.supplierId))) {
     const own = all.filter((each) => each.supplierId === supplierId);
-    const days = own.flatMap(({ arrivesOn }) => arrivesOn ?? []).sort();
     orders.push(
       await draftPurchaseOrder(work, {
         supplierId,
-        expectedOn: days.at(-1) ?? null,
+        // Worked out when it is sent, from whatever is on it by then.
+        expectedOn: null,
         note: noteFor([...new Set(own.flatMap(({ runs }) => runs))]),
         lines: own.map(({ line }) => line),
       }),

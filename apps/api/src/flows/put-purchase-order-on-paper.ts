@@ -4,9 +4,10 @@ import { findPurchaseOrder } from '../modules/purchase-orders/draft-purchase-ord
 import { paperOf } from '../modules/purchase-orders/purchase-order-paper.ts';
 import { reading, type Actor } from '../work.ts';
 
-/** An order's paper, drawn and kept, and the version of the order that it shows. */
+/** An order's paper, drawn and kept, with the version of the order and the day that it shows. */
 export interface PurchaseOrderOnPaper {
   version: number;
+  expectedOn: string | null;
   file: KeptFile;
 }
 
@@ -26,5 +27,6 @@ export async function putPurchaseOrderOnPaper(
   const bytes = await context.papers.purchaseOrder(paper);
   const hash = await context.files.keep(bytes);
   const name = `${paper.number}.pdf`;
-  return { version, file: { hash, name, type: 'application/pdf', size: bytes.byteLength } };
+  const file = { hash, name, type: 'application/pdf' as const, size: bytes.byteLength };
+  return { version, expectedOn: paper.expectedOn, file };
 }

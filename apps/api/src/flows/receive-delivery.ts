@@ -112,7 +112,7 @@ export async function describeReceipt(
   const hardware = [];
   for (const id of hardwareIds) hardware.push(await readOneHardware(work.em, id));
   const purchaseOrder =
-    purchaseOrderId === null ? null : await readOnePurchaseOrder(work.em, purchaseOrderId);
+    purchaseOrderId === null ? null : await readOnePurchaseOrder(work, purchaseOrderId);
   return { receipt, lots, hardware, purchaseOrder };
 }
 

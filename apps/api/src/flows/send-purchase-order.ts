@@ -1,4 +1,3 @@
-import { addDays } from '@hidewright/domain';
 import { invalid, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { noteFile, type KeptFile } from '../modules/files/stored-files.ts';
@@ -14,8 +13,8 @@ import type { PurchaseOrderOnPaper } from './put-purchase-order-on-paper.ts';
 import { sendLotsOut } from './services/send-lots-out.ts';
 
 /**
- * Sends a draft to its supplier, by e-mail with its paper or in the owner's own way; from now on it is awaited, and
- * the file that was sent stays. The lots that it has worked on go out with it.
+ * Sends a draft to its supplier, by e-mail with its paper or in the owner's own way; from now on it is awaited on the
+ * day that its paper names, and the file that was sent stays. The lots that it has worked on go out with it.
  * @throws {Problem} 409 when it is no draft, or less of such a lot is free, 422 when it cannot go by e-mail
  */
 export async function sendPurchaseOrder(
@@ -32,15 +31,16 @@ export async function sendPurchaseOrder(
   order.state = 'sent';
   order.paperHash = drawn.file.hash;
   order.sentAt = work.now.toISOString();
-  order.expectedOn ??= addDays(work.today, supplier.leadDays);
+  const moved = movedDay(order, drawn);
+  order.expectedOn = drawn.expectedOn;
   await work.em.flush();
   await sendLotsOut(work, order);
   if (asked.by === 'mail') await mail(work, order, { supplier, file: drawn.file });
   await logDeed(work, {
-    action: `sent purchase order ${order.number} to ${supplier.name} ${asked.by === 'mail' ? 'by e-mail' : 'by hand'}`,
+    action: `sent purchase order ${order.number} to ${supplier.name} ${asked.by === 'mail' ? 'by e-mail' : 'by hand'}${moved}`,
     subjectKind: 'purchase order',
     subjectId: order.id,
-    detail: { from: 'draft', to: 'sent', by: asked.by },
+    detail: { from: 'draft', to: 'sent', by: asked.by, expectedOn: order.expectedOn },
   });
 }
 
@@ -50,6 +50,11 @@ function notADraft(order: PurchaseOrder) {
     `${order.number} is ${order.state} already; only a draft can be sent.`,
     open ? ['receive'] : [],
   );
+}
+
+/** A day that was over when the paper was drawn is not what its supplier was told. */
+function movedDay({ expectedOn: from }: PurchaseOrder, { expectedOn: to }: PurchaseOrderOnPaper) {
+  return from === null || from === to ? '' : `, awaited ${to ?? 'some day'}, as ${from} is over`;
 }
 
 function requireMail(supplier: Supplier, mailIsSet: boolean): void {
@@ -80,7 +85,7 @@ async function mail(
   const workshop = await work.em.findOneOrFail(Workshop, 1);
   await enqueueMail(work, {
     recipient: supplier.email,
-    ...purchaseOrderLetter(await readOnePurchaseOrder(work.em, order.id), workshop),
+    ...purchaseOrderLetter(await readOnePurchaseOrder(work, order.id), workshop),
     attachments: [{ name, hash, type }],
     subjectKind: 'purchase order',
     subjectId: order.id,

@@ -1,4 +1,6 @@
 import { readNumber } from '../numbers/read-number.ts';
+import { addDays, type Day } from '../promise/day.ts';
+import { addWorkdays, isWorkday } from '../promise/workdays.ts';
 import { meanAndSpread } from './spread.ts';
 
 export interface LeadTime {
@@ -25,4 +27,13 @@ export function leadTime(said: number, took: readonly number[]): LeadTime {
   if (took.length < fewestDeliveries) return { meanDays: said, sdDays: 0, deliveries: 0 };
   const { mean, sd } = meanAndSpread(took);
   return { meanDays: mean, sdDays: sd, deliveries: took.length };
+}
+
+/**
+ * The day on which something comes that is ordered today: a delivery comes on a working day.
+ * @throws InvalidInput when today is no day
+ */
+export function arrivalDay(today: Day, { meanDays }: Pick<LeadTime, 'meanDays'>): Day {
+  const day = addDays(today, Math.round(meanDays));
+  return isWorkday(day) ? day : addWorkdays(day, 1);
 }

@@ -1,7 +1,7 @@
-import { addDays, addWorkdays, isWorkday, leadTime, type LeadTime } from '@hidewright/domain';
+import { arrivalDay, leadTime, type LeadTime } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
+import { readDaysTaken } from '../../modules/purchase-orders/days-taken.ts';
 import { Supplier } from '../../modules/suppliers/supplier.entity.ts';
-import { readDaysTaken } from './days-taken.ts';
 import { itemTerms, type BoughtRow, type ItemTerms } from './item-terms.ts';
 import { readOffersByItem, type OfferedThings } from './offers-by-item.ts';
 
@@ -28,11 +28,6 @@ export async function readItemSources(
     const sold = itemTerms(row, offers(`${row.of} ${row.id}`), suppliers);
     const took = sold.supplier === null ? [] : daysTaken(sold.supplier.id);
     const lead = leadTime(sold.leadDays, took);
-    return { ...sold, lead, arrivesOn: sold.supplier === null ? null : arrival(today, lead) };
+    return { ...sold, lead, arrivesOn: sold.supplier === null ? null : arrivalDay(today, lead) };
   };
-}
-
-function arrival(today: string, { meanDays }: LeadTime): string {
-  const day = addDays(today, Math.round(meanDays));
-  return isWorkday(day) ? day : addWorkdays(day, 1);
 }

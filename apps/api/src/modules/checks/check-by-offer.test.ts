@@ -56,7 +56,7 @@ it('goes by the offer that is preferred: its supplier, minimum, packs, days and 
   const { orders, notes } = await draft();
   expect(orders).toMatchObject([
     {
-      ...{ supplierName: 'Fennbridge Fittings', expectedOn: '2026-12-07' },
+      ...{ supplierName: 'Fennbridge Fittings', arrivesOn: '2026-12-07' },
       lines: [{ quantity: 500, unitPrice: '0.20' }],
     },
   ]);
@@ -92,7 +92,7 @@ it('takes leather by the offer as well, in ft² at its break', async () => {
   const breaks = [{ from: '0', price: '8.00' }];
   await offer({ leatherId, supplierId: oldbeck, breaks, multiple: '9290304', leadDays: 14 });
   const [lacking] = (await draft()).orders;
-  expect(lacking).toMatchObject({ supplierName: 'Oldbeck Tannery', expectedOn: '2026-12-15' });
+  expect(lacking).toMatchObject({ supplierName: 'Oldbeck Tannery', arrivesOn: '2026-12-15' });
   expect(lacking?.lines).toMatchObject([{ areaMm2: '9290304', unitPrice: '8.00' }]);
   expect((await check()).short).toEqual(
     expect.arrayContaining([expect.objectContaining({ of: 'leather', arrivesOn: '2026-12-15' })]),

@@ -38,7 +38,7 @@ export function checkRoutes(context: Context): Router {
       const checked = await checkPlanned(work, await planAskedRuns(work, body.runs, laid));
       const { orders, notes } = await draftWhatIsShort(work, checked);
       const ids = orders.map(({ id }) => id);
-      return { orders: await readPurchaseOrderList(work.em, { id: ids }, 100), notes };
+      return { orders: await readPurchaseOrderList(work, { id: ids }, 100), notes };
     },
     ({ body }) => layAskedPatterns(context, body.runs),
   );

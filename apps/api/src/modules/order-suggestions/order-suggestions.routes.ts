@@ -40,7 +40,7 @@ export function orderSuggestionRoutes(context: Context): Router {
 
   serve(router, context, draftSuggested, async (work, { body }) => {
     const { orderIds, notes } = await draftSuggestedOrders(work, body.lines);
-    return { orders: await readPurchaseOrderList(work.em, { id: orderIds }, 100), notes };
+    return { orders: await readPurchaseOrderList(work, { id: orderIds }, 100), notes };
   });
 
   return router;

@@ -1,11 +1,10 @@
-import { addDays, countedWords, minorDigits, unitWord } from '@hidewright/domain';
+import { countedWords, minorDigits, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine } from '@hidewright/contract';
 import { dayIn } from '../../day-in.ts';
 import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
 import type { Work } from '../../work.ts';
 import { sayArea } from '../stock/say-area.ts';
-import { Supplier } from '../suppliers/supplier.entity.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
 import { readOnePurchaseOrder } from './read-purchase-orders.ts';
@@ -13,15 +12,14 @@ import { readOnePurchaseOrder } from './read-purchase-orders.ts';
 /** What goes on paper for an order as it is now; a draft as it would be if it were sent today. */
 export async function paperOf(work: Work, order: PurchaseOrder): Promise<PurchaseOrderPaper> {
   const workshop = await work.em.findOneOrFail(Workshop, 1);
-  const { leadDays } = await work.em.findOneOrFail(Supplier, order.supplierId);
-  const told = await readOnePurchaseOrder(work.em, order.id);
+  const told = await readOnePurchaseOrder(work, order.id);
   return {
     number: order.number,
     shopName: workshop.name,
     shopAddress: workshop.address,
     supplierName: told.supplierName,
     day: order.sentAt === null ? work.today : dayIn(workshop.timeZone, new Date(order.sentAt)),
-    expectedOn: order.expectedOn ?? addDays(work.today, leadDays),
+    expectedOn: told.arrivesOn ?? told.expectedOn,
     currency: workshop.currency,
     digits: minorDigits(workshop.currency),
     lines: told.lines.map((line) => printedLine(line, workshop.areaUnit)),

@@ -39,18 +39,18 @@ import { readOnePurchaseOrder, readPurchaseOrderList } from './read-purchase-ord
 export function purchaseOrderRoutes(context: Context): Router {
   const router = Router();
 
-  serve(router, context, listPurchaseOrders, async ({ em }, { query }) => {
-    const rows = await readPurchaseOrderList(em, filtersOf(query), query.limit + 1);
+  serve(router, context, listPurchaseOrders, async (work, { query }) => {
+    const rows = await readPurchaseOrderList(work, filtersOf(query), query.limit + 1);
     return toPage(rows, query.limit, (row) => row.id);
   });
 
-  serve(router, context, readPurchaseOrder, async ({ em }, { params }) =>
-    readOnePurchaseOrder(em, params.id),
+  serve(router, context, readPurchaseOrder, async (work, { params }) =>
+    readOnePurchaseOrder(work, params.id),
   );
 
   serve(router, context, addPurchaseOrder, async (work, { body }) => {
     const order = await draftPurchaseOrder(work, body);
-    return readOnePurchaseOrder(work.em, order.id);
+    return readOnePurchaseOrder(work, order.id);
   });
 
   serve(router, context, changePurchaseOrder, async (work, { params, body, ifMatch }) => {
@@ -61,7 +61,7 @@ export function purchaseOrderRoutes(context: Context): Router {
       ifMatch,
     );
     await changeDraft(work, order, body);
-    return readOnePurchaseOrder(work.em, order.id);
+    return readOnePurchaseOrder(work, order.id);
   });
 
   serve(router, context, changeAwaitedDay, async (work, { params, body, ifMatch }) => {
@@ -69,20 +69,20 @@ export function purchaseOrderRoutes(context: Context): Router {
     const { id, version } = order;
     await requireVersion(work.em, { kind: 'purchase order', id, version }, ifMatch);
     await awaitLineOn(work, order, { lineId: params.lineId, expectedOn: body.expectedOn });
-    return readOnePurchaseOrder(work.em, id);
+    return readOnePurchaseOrder(work, id);
   });
 
   serve(router, context, closePurchaseLine, async (work, { params, body }) => {
     const order = await findPurchaseOrder(work, params.id);
     await closeLine(work, order, { lineId: params.lineId, reason: body.reason });
     await putLotsBack(work, order, params.lineId);
-    return readOnePurchaseOrder(work.em, order.id);
+    return readOnePurchaseOrder(work, order.id);
   });
 
   serve(router, context, reopenPurchaseOrder, async (work, { params, body }) => {
     const order = await findPurchaseOrder(work, params.id);
     await reopenLines(work, order, body);
-    return readOnePurchaseOrder(work.em, order.id);
+    return readOnePurchaseOrder(work, order.id);
   });
 
   serve(
@@ -92,7 +92,7 @@ export function purchaseOrderRoutes(context: Context): Router {
     async (work, { params, body }, drawn: PurchaseOrderOnPaper) => {
       const asked = { id: params.id, by: body.by, mailIsSet: context.mailer.available };
       await sendPurchaseOrder(work, asked, drawn);
-      return readOnePurchaseOrder(work.em, params.id);
+      return readOnePurchaseOrder(work, params.id);
     },
     ({ params }, actor) => putPurchaseOrderOnPaper(context, actor, params.id),
   );
@@ -110,7 +110,7 @@ export function purchaseOrderRoutes(context: Context): Router {
     const order = await findPurchaseOrder(work, params.id);
     await cancelPurchaseOrder(work, order, body.reason);
     await putLotsBack(work, order);
-    return readOnePurchaseOrder(work.em, params.id);
+    return readOnePurchaseOrder(work, params.id);
   });
 
   return router;

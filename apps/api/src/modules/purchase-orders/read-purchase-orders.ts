@@ -1,12 +1,13 @@
 import { Decimal } from 'decimal.js';
 import type { FilterQuery } from '@mikro-orm/core';
-import type { EntityManager } from '@mikro-orm/sqlite';
 import type { PurchaseLine as LineReply, PurchaseOrder as OrderReply } from '@hidewright/contract';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { moneyText, priceText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
+import type { Work } from '../../work.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { lineProgress } from '@hidewright/domain';
+import { readDraftArrivals } from './draft-arrivals.ts';
 import { lineAmount } from './line-amount.ts';
 import { nameOf, readLineNames, serviceOf, type LineNames } from './line-names.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
@@ -15,10 +16,11 @@ import { PurchaseOrder } from './purchase-order.entity.ts';
 
 /** Orders with their lines and every name in them, newest first. */
 export async function readPurchaseOrderList(
-  em: EntityManager,
+  work: Pick<Work, 'em' | 'today'>,
   where: FilterQuery<PurchaseOrder>,
   limit: number,
 ): Promise<OrderReply[]> {
+  const { em } = work;
   const orders = await em.find(PurchaseOrder, where, { orderBy: { id: 'desc' }, limit });
   const lines = await em.find(
     PurchaseLine,
@@ -27,16 +29,20 @@ export async function readPurchaseOrderList(
   );
   const names = await readLineNames(em, lines);
   const paid = await readPaid(em, lines);
+  const arrivals = await readDraftArrivals(work, orders);
   const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
   return orders.map((order) => {
     const own = lines.filter((line) => line.purchaseOrderId === order.id);
-    return toReply(order, suppliers.get(order.supplierId), own, { names, paid });
+    return toReply(order, suppliers.get(order.supplierId), own, { names, paid, arrivals });
   });
 }
 
 /** @throws {Problem} 404 */
-export async function readOnePurchaseOrder(em: EntityManager, id: number): Promise<OrderReply> {
-  const [found] = await readPurchaseOrderList(em, { id }, 1);
+export async function readOnePurchaseOrder(
+  work: Pick<Work, 'em' | 'today'>,
+  id: number,
+): Promise<OrderReply> {
+  const [found] = await readPurchaseOrderList(work, { id }, 1);
   if (found === undefined) throw notFound('purchase order');
   return found;
 }
@@ -48,6 +54,7 @@ async function byId<T extends { id: number }>(rows: Promise<T[]>): Promise<Map<n
 interface Known {
   names: LineNames;
   paid: Paid;
+  arrivals: ReadonlyMap<number, string>;
 }
 
 function toReply(
@@ -66,6 +73,7 @@ function toReply(
     createdAt: order.createdAt,
     sentAt: order.sentAt,
     expectedOn: order.expectedOn,
+    arrivesOn: known.arrivals.get(order.id) ?? null,
     awaitedOn: awaitedOn(order, lines),
     note: order.note,
     lines: lines.map((line) => toLine(line, order, known)),

@@ -49,7 +49,7 @@ export function PurchaseOrderForm(props: PurchaseOrderFormProps) {
         optional
         min={today}
         whenEmpty="null"
-        help="Left empty, it is worked out from the supplier’s days when the order is sent."
+        help="Left empty, it is worked out when the order is sent, from how long its slowest line takes."
       />
       <Stitch />
       <OrderLines leathers={leathers} hardware={hardware} />

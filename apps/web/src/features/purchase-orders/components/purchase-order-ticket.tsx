@@ -13,7 +13,7 @@ interface PurchaseOrderTicketProps {
 export function PurchaseOrderTicket({ order, actions }: PurchaseOrderTicketProps) {
   const { currency, today, timeZone } = useWorkshop();
   const { number, supplierName, sentAt, total } = order;
-  const expectedOn = order.awaitedOn ?? order.expectedOn;
+  const expectedOn = order.awaitedOn ?? order.arrivesOn ?? order.expectedOn;
   return (
     <Ticket
       level={1}
@@ -26,7 +26,9 @@ export function PurchaseOrderTicket({ order, actions }: PurchaseOrderTicketProps
             <OrderState order={order} />
           </TicketFact>
           {expectedOn !== null && (
-            <TicketFact word="Expected">{dayText(expectedOn, today)}</TicketFact>
+            <TicketFact word={order.arrivesOn === null ? 'Expected' : 'Expected, if sent today'}>
+              {dayText(expectedOn, today)}
+            </TicketFact>
           )}
           {total !== undefined && (
             <TicketFact word={`Total, ${currency}`}>{moneyText(total)}</TicketFact>

@@ -9,7 +9,8 @@ import { OrderState } from './order-state.tsx';
 
 const whatOf = (order: PurchaseOrder) => order.lines.map((line) => line.name).join(', ');
 
-const expectedOf = ({ awaitedOn, expectedOn }: PurchaseOrder) => awaitedOn ?? expectedOn;
+const expectedOf = ({ awaitedOn, arrivesOn, expectedOn }: PurchaseOrder) =>
+  awaitedOn ?? arrivesOn ?? expectedOn;
 
 function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<PurchaseOrder>[] {
   const total: Column<PurchaseOrder> = {

@@ -3,6 +3,8 @@ import { Dialog } from '../../../components/dialog.tsx';
 import { Form } from '../../../components/form.tsx';
 import { RadioCards } from '../../../components/radio-cards.tsx';
 import { say } from '../../../components/toast.ts';
+import { dayText } from '../../../lib/formatting.ts';
+import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useSendPurchaseOrder } from '../purchase-orders.mutations.ts';
 import { lotsOf } from '../service-words.ts';
 
@@ -14,6 +16,7 @@ interface SendOrderDialogProps {
 
 export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogProps) {
   const send = useSendPurchaseOrder();
+  const { today } = useWorkshop();
   const { supplierEmail } = order;
   const lots = lotsOf(order);
   const cards = [
@@ -31,7 +34,7 @@ export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogPr
       open={open}
       onOpenChange={onOpenChange}
       title={`Send ${order.number} to ${order.supplierName}`}
-      description={`${lots === '' ? '' : `${lots} goes off the rack with it. `}Once it is sent it cannot be changed; until something has come it can be cancelled.`}
+      description={`${lots === '' ? '' : `${lots} goes off the rack with it. `}${awaitedWords(order, today)}Once it is sent it cannot be changed; until something has come it can be cancelled.`}
     >
       <Form
         schema={sendPurchaseOrder.body}
@@ -47,4 +50,13 @@ export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogPr
       </Form>
     </Dialog>
   );
+}
+
+/** A day that was chosen and is over by now is worked out anew when the order is sent. */
+function awaitedWords({ expectedOn, arrivesOn }: PurchaseOrder, today: string): string {
+  if (arrivesOn === null) return '';
+  const awaited = `It is awaited ${dayText(arrivesOn, today)}`;
+  return expectedOn === null || expectedOn === arrivesOn
+    ? `${awaited}. `
+    : `${awaited}, as ${dayText(expectedOn, today)}, the day on it, is over. `;
 }
