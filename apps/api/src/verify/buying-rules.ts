@@ -4,10 +4,10 @@ export const buyingRules: Rule[] = [
   none(
     'An order line counts as received what came on it',
     `SELECT p.number || ' line ' || n.position || ' says ' || n.received || ' received, its deliveries ' ||
-      COALESCE(SUM(l.quantity), 0) AS fault
+      COALESCE(SUM(COALESCE(l.marked_area_mm2, l.quantity)), 0) AS fault
     FROM purchase_line n JOIN purchase_order p ON p.id = n.purchase_order_id
     LEFT JOIN receipt_line l ON l.purchase_line_id = n.id
-    GROUP BY n.id HAVING COALESCE(SUM(l.quantity), 0) <> n.received`,
+    GROUP BY n.id HAVING COALESCE(SUM(COALESCE(l.marked_area_mm2, l.quantity)), 0) <> n.received`,
   ),
   none(
     'An order counts its deliveries',

@@ -50,8 +50,8 @@ export async function priceLot(
   if (leather === null)
     throw invalid([{ field: `${field}.leatherId`, message: 'Choose a leather from the list.' }]);
   const quantity = scaled(new Decimal(typed.measuredAreaMm2), 3);
-  const line = delivery.fill(typed, quantity, field);
   const paidFor = new Decimal(typed.markedAreaMm2 ?? typed.measuredAreaMm2);
+  const line = delivery.fill(typed, scaled(paidFor, 3), field);
   const goods =
     typed.cost === null
       ? leatherCost(paidFor, line?.unitPrice ?? leather.pricePerFt2, `${field}.cost`)

@@ -27,6 +27,7 @@ export class PurchaseLine {
   @Property({ type: 'integer', columnType: 'integer' })
   quantity!: number;
 
+  /** As it is paid for: of leather the marked area, where there is one. */
   @Property({ type: 'integer', columnType: 'integer' })
   received = 0;
 

@@ -187,6 +187,33 @@ describe('what a delivery cost, put right', () => {
   });
 });
 
+describe('leather that is short of its mark', () => {
+  it('fills its line by what is paid for, and hangs as measured', async () => {
+    const { body } = await receive({
+      lots: [side({ measuredAreaMm2: ft2(38.5), markedAreaMm2: ft2(40) })],
+      hardware: [rivets(1000)],
+    }).expect(201);
+    expect(body.purchaseOrder).toMatchObject({ state: 'received', awaitedOn: null });
+    expect(body.purchaseOrder.lines[0]).toMatchObject({
+      receivedAreaMm2: '3716121.6',
+      toCome: { areaMm2: '0' },
+      short: { areaMm2: '0' },
+    });
+    expect(body.lots[0]).toMatchObject({ onHandAreaMm2: '3576767.04' });
+    const leather = await shop.as('owner').get(`/api/leathers/${things.leatherId}`).expect(200);
+    expect(leather.body).toMatchObject({ onOrderAreaMm2: '0' });
+    const { dataDir } = shop.context.config;
+    expect((await verifyFolder(dataDir)).filter(({ faults }) => faults.length > 0)).toEqual([]);
+  });
+
+  it('leaves to come what was ordered beyond the mark, on that day as well', async () => {
+    const { body } = await receive({
+      lots: [side({ measuredAreaMm2: ft2(24), markedAreaMm2: ft2(25.5) })],
+    }).expect(201);
+    expect(body.purchaseOrder.lines[0]).toMatchObject({ toCome: { areaMm2: ft2(14.5) } });
+  });
+});
+
 describe('part deliveries', () => {
   it('leave the rest awaited with its own day, and closed it is short', async () => {
     const first = await receive({ hardware: [rivets(600)] }).expect(201);

@@ -16,7 +16,7 @@ const then = `WITH
   held AS (SELECT r.lot_id, r.hardware_id, SUM(m.quantity) AS quantity
     FROM asked, reservation_movement m JOIN reservation r ON r.id = m.reservation_id
     WHERE m.day <= asked.day GROUP BY r.lot_id, r.hardware_id),
-  came AS (SELECT l.purchase_line_id AS id, SUM(l.quantity) AS quantity
+  came AS (SELECT l.purchase_line_id AS id, SUM(COALESCE(l.marked_area_mm2, l.quantity)) AS quantity
     FROM asked, receipt_line l JOIN receipt t ON t.id = l.receipt_id
     WHERE t.received_on <= asked.day AND l.purchase_line_id IS NOT NULL GROUP BY l.purchase_line_id),
   awaited AS (SELECT l.leather_id, l.hardware_id, SUM(MAX(0, l.quantity - COALESCE(came.quantity, 0))) AS quantity

@@ -91,10 +91,10 @@ async function order(
 
 async function leatherLines({ em }: Work, furnished: Furnished, { leather = [] }: Purchase) {
   const lines = [];
-  for (const { name, areasFt2 } of leather) {
+  for (const { name, areasFt2, markedFt2 = areasFt2 } of leather) {
     const leatherId = furnished.leathers.id(name);
     const { pricePerFt2 } = await em.findOneOrFail(Leather, leatherId);
-    const areaMm2 = areaOf(areasFt2.reduce((sum, ft2) => sum + Number(ft2), 0).toFixed(1));
+    const areaMm2 = areaOf(markedFt2.reduce((sum, ft2) => sum + Number(ft2), 0).toFixed(2));
     lines.push({ of: 'leather' as const, leatherId, areaMm2, unitPrice: priceText(pricePerFt2) });
   }
   return lines;
