@@ -41,5 +41,17 @@ export async function readUsedByWeek(
 function seriesOf({ first, weeks }: Row, today: string): number[] {
   const count = Math.min(weeksOfAYear, Math.floor((daysBetween(first, today) + 1) / 7));
   const used = new Map(JSON.parse(weeks ?? '[]') as [number, number][]);
-  return Array.from({ length: count }, (_, at) => Math.max(0, used.get(count - 1 - at) ?? 0));
+  const taken = Array.from({ length: count }, (_, at) => used.get(count - 1 - at) ?? 0);
+  return withReturnsCarriedBack(taken);
+}
+
+/** What comes back in a week in which less is taken was not used in the weeks before it. */
+function withReturnsCarriedBack(taken: readonly number[]): number[] {
+  const series: number[] = [];
+  let back = 0;
+  for (const used of taken.toReversed()) {
+    series.unshift(Math.max(0, used - back));
+    back = Math.max(0, back - used);
+  }
+  return series;
 }

@@ -123,6 +123,31 @@ describe('what to order', () => {
     expect(Number(then.economic) / Number(item.economic)).toBeCloseTo(2, 3);
   });
 
+  it('counts what is put back in a later week as never used', async () => {
+    const day = (on: string) => shop.clock.set(new Date(`${on}T09:00:00Z`));
+    const leatherId = things.leatherId;
+    day('2026-11-10');
+    const side = { leatherId, form: 'side', measuredAreaMm2: ft2(22) };
+    const { body } = await owner()
+      .post('/api/receipts')
+      .send({ lots: [side] })
+      .expect(201);
+    const lotId = body.lots[0].id as number;
+    day('2026-11-19');
+    const all = Number(ft2(22)) * 1000;
+    await inTransaction(shop.context, theProgram, (work) =>
+      takeStock(work, { lotId, jobId: null, quantity: all }),
+    );
+    await shop.context.orm.em.fork().execute(
+      `INSERT INTO stock_movement (at, day, kind, lot_id, quantity, value, reason, actor_name)
+        VALUES ('2026-11-26T09:00:00.000Z', '2026-11-26', 'return', ?, ?, 0, '', 'The maker')`,
+      [lotId, Number(ft2(10)) * 1000],
+    );
+    day('2026-12-01');
+    const { usage } = await leather();
+    expect(usage.series).toEqual(['0', String(Number(ft2(12))), '0']);
+  });
+
   it('tells the maker no price, and lets neither the maker nor the bookkeeper order', async () => {
     const item = await rivets('maker');
     expect(item).toMatchObject({ state: 'now' });
