@@ -1,4 +1,5 @@
 import { ApiProblem } from './api-problem.ts';
+import { KeptList } from './kept-list.ts';
 
 /** What is kept on this device until it has arrived. */
 interface Kept {
@@ -9,6 +10,8 @@ interface Kept {
 interface Answers<Waiting, Reply> {
   onSent: (sent: Waiting, reply: Reply) => void;
   onRefused: (refused: Waiting, problem: ApiProblem) => void;
+  /** Whether it is finished and may go; everything is, unless said. */
+  mayGo?: (waits: Waiting) => boolean;
 }
 
 /**
@@ -16,42 +19,46 @@ interface Answers<Waiting, Reply> {
  * first, until the workshop's computer has answered.
  */
 export class Outbox<Waiting extends Kept, Reply> {
-  readonly #place: string;
+  readonly #list: KeptList<Waiting>;
   readonly #deliver: (waits: Waiting) => Promise<Reply>;
-  readonly #listeners = new Set<() => void>();
-  #waiting: readonly Waiting[];
-  #sending = false;
+  #underWay: Promise<void> | undefined;
 
   /** @param place under which it is kept in the browser's storage */
   constructor(place: string, deliver: (waits: Waiting) => Promise<Reply>) {
-    this.#place = place;
+    this.#list = new KeptList(place);
     this.#deliver = deliver;
-    this.#waiting = this.#read();
   }
 
-  readonly subscribe = (listener: () => void): (() => void) => {
-    this.#listeners.add(listener);
-    return () => this.#listeners.delete(listener);
-  };
+  readonly subscribe = (listener: () => void): (() => void) => this.#list.subscribe(listener);
 
-  readonly waiting = (): readonly Waiting[] => this.#waiting;
+  readonly waiting = (): readonly Waiting[] => this.#list.all();
 
   /** Adds one, instead of those that it replaces. */
   put(next: Waiting, replaces: (other: Waiting) => boolean = () => false): void {
-    this.#keep([...this.#waiting.filter((each) => !replaces(each)), next]);
+    this.#list.keep([...this.waiting().filter((each) => !replaces(each)), next]);
   }
 
-  /** Sends what this person has waiting; stops where the workshop's computer cannot be reached. */
-  async send(person: string, answers: Answers<Waiting, Reply>): Promise<void> {
-    if (this.#sending) return;
-    this.#sending = true;
-    const nextOf = () => this.#waiting.find((each) => each.person === person);
-    try {
-      for (let next = nextOf(); next !== undefined; next = nextOf()) {
-        if (!(await this.#sendOne(next, answers))) return;
-      }
-    } finally {
-      this.#sending = false;
+  /** What was typed does not hold any more: it is not sent. */
+  takeBack(which: (waits: Waiting) => boolean): void {
+    if (this.waiting().some(which)) this.#list.keep(this.waiting().filter((each) => !which(each)));
+  }
+
+  /**
+   * Sends what this person has waiting; stops where the workshop's computer cannot be reached. Whoever asks while it
+   * is under way waits until that is over: what still waits then has not arrived.
+   */
+  send(person: string, answers: Answers<Waiting, Reply>): Promise<void> {
+    this.#underWay ??= this.#sendAll(person, answers).finally(() => {
+      this.#underWay = undefined;
+    });
+    return this.#underWay;
+  }
+
+  async #sendAll(person: string, answers: Answers<Waiting, Reply>): Promise<void> {
+    const { mayGo = () => true } = answers;
+    const nextOf = () => this.waiting().find((each) => each.person === person && mayGo(each));
+    for (let next = nextOf(); next !== undefined; next = nextOf()) {
+      if (!(await this.#sendOne(next, answers))) return;
     }
   }
 
@@ -73,24 +80,6 @@ export class Outbox<Waiting extends Kept, Reply> {
 
   /** Only what was sent: something later about the same may have come meanwhile. */
   #drop(sent: Waiting): void {
-    this.#keep(this.#waiting.filter((each) => each !== sent));
-  }
-
-  #read(): readonly Waiting[] {
-    try {
-      return JSON.parse(localStorage.getItem(this.#place) ?? '[]') as Waiting[];
-    } catch {
-      return [];
-    }
-  }
-
-  #keep(next: readonly Waiting[]): void {
-    this.#waiting = next;
-    try {
-      localStorage.setItem(this.#place, JSON.stringify(next));
-    } catch {
-      // Storage is full or switched off: what waits is kept as long as this page is open.
-    }
-    for (const listener of this.#listeners) listener();
+    this.#list.keep(this.waiting().filter((each) => each !== sent));
   }
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { countedText, figureOf, readEntry, whatLies } from './count-words.ts';
+import { countedText, figureOf, mayBecomeEntry, readEntry, whatLies } from './count-words.ts';
 
 const blank = { lotId: 1, countedAreaMm2: null, countedQuantity: null, unmeasured: false };
 
@@ -18,6 +18,15 @@ describe('what is typed while counting', () => {
 
   it('takes the count away when it is emptied', () => {
     expect(readEntry('  ', true, 'ft2')).toEqual({});
+  });
+
+  it('is not complained of while it may still become a figure', () => {
+    for (const half of ['24.', '24 3', '24 3/', '.']) {
+      expect(readEntry(half, true, 'ft2'), half).toBeTypeOf('string');
+      expect(mayBecomeEntry(half, true, 'ft2'), half).toBe(half !== '.');
+    }
+    for (const none of ['-', '12.', '12.5', 'ten'])
+      expect(mayBecomeEntry(none, false, 'ft2'), none).toBe(false);
   });
 
   it('is shown again as it was typed', () => {

@@ -27,6 +27,13 @@ export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry |
     : 'Enter how many pieces there are; 0 when there are none.';
 }
 
+/** Whether what was typed so far may be the beginning of a figure. */
+export function mayBecomeEntry(text: string, ofLot: boolean, unit: AreaUnit): boolean {
+  return ['', '5', '/4', '3/4', '0', '00', '000'].some(
+    (rest) => typeof readEntry(text + rest, ofLot, unit) !== 'string',
+  );
+}
+
 /** What was counted, in words. */
 export function countedText(line: Counted, unit: AreaUnit): string {
   if (line.unmeasured) return 'hangs there, not measured';

@@ -1,5 +1,6 @@
 import { enterCount, type ReplyOf } from '@hidewright/contract';
 import { call } from '../../lib/api.ts';
+import { KeptList } from '../../lib/kept-list.ts';
 import { Outbox } from '../../lib/outbox.ts';
 
 /** What was counted: nothing named takes the count away again. */
@@ -29,10 +30,43 @@ export const entryOutbox = new Outbox<WaitingEntry, ReplyOf<typeof enterCount>>(
   },
 );
 
-/** What is typed later of a line stands instead of what still waits. */
+/** What was counted and is not taken: it stays visible on its own sheet until somebody has seen it. */
+export interface RefusedEntry extends WaitingEntry {
+  why: string;
+}
+
+export const refusedEntries = new KeptList<RefusedEntry>('hidewright-refused-counts');
+
+type Line = Pick<WaitingEntry, 'person' | 'lineId'>;
+type Sheet = Pick<WaitingEntry, 'person' | 'countId'>;
+
+const sameLine = (one: Line) => (other: Line) =>
+  other.person === one.person && other.lineId === one.lineId;
+
+const onSheet = (one: Sheet) => (other: Sheet) =>
+  other.person === one.person && other.countId === one.countId;
+
+/** What is typed later of a line stands instead of what still waits, or was refused. */
 export function putEntry(entry: Omit<WaitingEntry, 'typedAt'>): void {
-  entryOutbox.put(
-    { ...entry, typedAt: Date.now() },
-    ({ person, lineId }) => person === entry.person && lineId === entry.lineId,
-  );
+  refusedEntries.keep(refusedEntries.all().filter((each) => !sameLine(entry)(each)));
+  entryOutbox.put({ ...entry, typedAt: Date.now() }, sameLine(entry));
+}
+
+/** What is typed there now is no figure: the beginning of it, which was one, is not sent. */
+export function takeBackEntry(line: Line): void {
+  entryOutbox.takeBack(sameLine(line));
+}
+
+export function keepRefused(refused: WaitingEntry, why: string): void {
+  const others = refusedEntries.all().filter((each) => !sameLine(refused)(each));
+  refusedEntries.keep([...others, { ...refused, why }]);
+}
+
+export function forgetRefused(sheet: Sheet): void {
+  refusedEntries.keep(refusedEntries.all().filter((each) => !onSheet(sheet)(each)));
+}
+
+/** What of a sheet waits on this device, or was refused. */
+export function ofSheet<Each extends Sheet>(all: readonly Each[], sheet: Sheet): readonly Each[] {
+  return all.filter(onSheet(sheet));
 }

@@ -12,6 +12,7 @@ import { StateMark } from '../../../components/state-mark.tsx';
 import { say } from '../../../components/toast.ts';
 import { CountReview } from '../../../features/counts/components/count-review.tsx';
 import { CountSheet } from '../../../features/counts/components/count-sheet.tsx';
+import { LeftOnDevice } from '../../../features/counts/components/left-on-device.tsx';
 import { useCancelCount } from '../../../features/counts/counts.mutations.ts';
 import { countQuery } from '../../../features/counts/counts.queries.ts';
 import { sessionQuery } from '../../../features/session/session.queries.ts';
@@ -43,6 +44,7 @@ export function Component() {
         <CountSheet key={id} sheet={sheet} person={person} />
       ) : (
         <div className="space-y-4">
+          {handlesStock && <LeftOnDevice key={id} sheet={sheet} person={person} />}
           <LeftShort sheet={sheet} />
           {sheet.state === 'handed in' && !isOwner && (
             <Notice>The owner looks at it next. Nothing is changed until it is approved.</Notice>

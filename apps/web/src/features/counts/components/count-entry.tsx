@@ -8,14 +8,15 @@ import { StateMark } from '../../../components/state-mark.tsx';
 import { WeighCount } from '../../../components/weigh-count.tsx';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { figureOf, readEntry } from '../count-words.ts';
+import { figureOf, mayBecomeEntry, readEntry } from '../count-words.ts';
 import type { Entry } from '../entry-outbox.ts';
 
 interface CountEntryProps {
   line: CountLine;
   /** What was typed here and has not arrived yet. */
   waits: boolean;
-  onEnter: (entry: Entry) => void;
+  /** What was typed; nothing where it is no figure. */
+  onRead: (entry: Entry | undefined) => void;
   /** The figure is finished: send it. */
   onDone: () => void;
   onNext: () => void;
@@ -24,7 +25,7 @@ interface CountEntryProps {
 export const entryId = (lineId: number): string => `count-line-${lineId}`;
 
 /** One thing to count: its tag and name, and what is there of it. */
-export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryProps) {
+export function CountEntry({ line, waits, onRead, onDone, onNext }: CountEntryProps) {
   const { areaUnit } = useWorkshop();
   const id = useId();
   const ofLot = line.lotId !== null;
@@ -33,11 +34,28 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
   const text = typed ?? figure;
   const entry = readEntry(text, ofLot, areaUnit);
   const wrong = typeof entry === 'string' ? entry : undefined;
+  const [over, setOver] = useState(false);
+  // Half a figure is not complained of while the rest of it is still to come.
+  const shown = over || !mayBecomeEntry(text, ofLot, areaUnit) ? wrong : undefined;
 
   function type(next: string) {
     setTyped(next);
+    setOver(false);
     const read = readEntry(next, ofLot, areaUnit);
-    if (typeof read !== 'string') onEnter(read);
+    onRead(typeof read === 'string' ? undefined : read);
+  }
+
+  function leave() {
+    setOver(true);
+    if (wrong !== undefined) return;
+    setTyped(undefined);
+    onDone();
+  }
+
+  function take(found: Entry) {
+    setTyped(undefined);
+    onRead(found);
+    onDone();
   }
 
   return (
@@ -47,14 +65,14 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
           {line.tag}
           <span className="ml-2 font-normal text-ink-soft">{describe(line)}</span>
         </label>
-        <EntryState line={line} waits={waits} />
+        {wrong === undefined && <EntryState line={line} waits={waits} />}
       </div>
       <div className="mt-2 flex flex-wrap items-center gap-2">
         <InputFrame
           id={entryId(line.id)}
           unit={line.unit === null ? areaUnits[areaUnit].sign : unitWord(line.unit, 2)}
           short
-          invalid={wrong !== undefined}
+          invalid={shown !== undefined}
         >
           <input
             id={entryId(line.id)}
@@ -63,13 +81,10 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
             autoComplete="off"
             enterKeyHint="next"
             value={text}
-            aria-invalid={wrong !== undefined}
-            aria-describedby={wrong === undefined ? undefined : `${id}-wrong`}
+            aria-invalid={shown !== undefined}
+            aria-describedby={shown === undefined ? undefined : `${id}-wrong`}
             onChange={(event) => type(event.target.value)}
-            onBlur={() => {
-              if (wrong === undefined) setTyped(undefined);
-              onDone();
-            }}
+            onBlur={leave}
             onKeyDown={(event) => {
               if (event.key === 'Enter') onNext();
             }}
@@ -81,31 +96,20 @@ export function CountEntry({ line, waits, onEnter, onDone, onNext }: CountEntryP
             className="min-h-11"
             tone={line.unmeasured ? 'primary' : 'secondary'}
             aria-pressed={line.unmeasured}
-            onClick={() => {
-              setTyped(undefined);
-              onEnter(line.unmeasured ? {} : { unmeasured: true });
-              onDone();
-            }}
+            onClick={() => take(line.unmeasured ? {} : { unmeasured: true })}
           >
             Hangs uncut
           </Button>
         )}
       </div>
-      {!ofLot && (
-        <WeighCount
-          of={line.tag}
-          onCount={(count) => {
-            setTyped(undefined);
-            onEnter({ quantity: count });
-            onDone();
-          }}
-        />
-      )}
-      {wrong !== undefined && (
-        <p id={`${id}-wrong`} className="mt-1 text-sm font-semibold text-oxblood">
-          {wrong}
-        </p>
-      )}
+      {!ofLot && <WeighCount of={line.tag} onCount={(count) => take({ quantity: count })} />}
+      <p
+        id={`${id}-wrong`}
+        role="alert"
+        className="mt-1 text-sm font-semibold text-oxblood empty:hidden"
+      >
+        {shown}
+      </p>
     </li>
   );
 }

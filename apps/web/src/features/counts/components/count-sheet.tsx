@@ -1,15 +1,17 @@
 import type { StockCount } from '@hidewright/contract';
 import { useQueryClient } from '@tanstack/react-query';
 import { useRef, useState } from 'react';
-import { Notice } from '../../../components/notice.tsx';
 import { ScanField } from '../../../components/scan-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { useAddToCount } from '../counts.mutations.ts';
 import { countQuery } from '../counts.queries.ts';
-import type { WaitingEntry } from '../entry-outbox.ts';
+import { requireAllArrived } from '../all-arrived.ts';
+import { asTyped, hasFigure } from '../as-typed.ts';
+import type { Entry } from '../entry-outbox.ts';
 import { useEntryOutbox, withLine } from '../use-entry-outbox.ts';
 import { CountEntry, entryId } from './count-entry.tsx';
 import { HandIn } from './hand-in.tsx';
+import { RefusedEntries } from './refused-entries.tsx';
 
 interface CountSheetProps {
   sheet: StockCount;
@@ -25,14 +27,28 @@ const focusOn = (lineId: number) => {
 
 /** A sheet being counted: find the line by eye or by its tag, type what is there, go on. */
 export function CountSheet({ sheet, person }: CountSheetProps) {
-  const { enter, send, refused, waiting } = useEntryOutbox(person, sheet.id);
+  const { enter, takeBack, finish, send, refused, waiting } = useEntryOutbox(person, sheet.id);
+  const [unreadable, setUnreadable] = useState<readonly number[]>([]);
   const scan = useRef<HTMLDivElement>(null);
   const scanned = useRef(false);
   const { find, error } = useFinding(sheet, (lineId) => {
     scanned.current = true;
     focusOn(lineId);
   });
-  const lines = sheet.lines.map((line) => asTyped(line, waiting));
+  // As this device knows them: what was typed here and is still on its way counts.
+  const lines = sheet.lines.map((line) => {
+    const waits = waiting.find((each) => each.lineId === line.id);
+    return waits ? asTyped(line, waits.entry) : line;
+  });
+
+  function read(lineId: number, entry: Entry | undefined) {
+    setUnreadable((before) => [
+      ...before.filter((each) => each !== lineId),
+      ...(entry ? [] : [lineId]),
+    ]);
+    if (entry) enter(lineId, entry);
+    else takeBack(lineId);
+  }
 
   function goOn(lineId: number) {
     if (scanned.current) {
@@ -47,11 +63,7 @@ export function CountSheet({ sheet, person }: CountSheetProps) {
 
   return (
     <div className="space-y-4">
-      {refused && (
-        <Notice tone="danger" live>
-          {refused.detail}
-        </Notice>
-      )}
+      <RefusedEntries sheet={sheet} person={person} refused={refused} />
       <div ref={scan}>
         <ScanField
           label="Scan or type a tag"
@@ -66,26 +78,22 @@ export function CountSheet({ sheet, person }: CountSheetProps) {
             key={line.id}
             line={line}
             waits={waiting.some((each) => each.lineId === line.id)}
-            onEnter={(entry) => enter(line.id, entry)}
-            onDone={() => void send()}
+            onRead={(entry) => read(line.id, entry)}
+            onDone={finish}
             onNext={() => goOn(line.id)}
           />
         ))}
       </ul>
-      <HandIn sheet={sheet} waiting={waiting.length} send={send} />
+      <HandIn
+        sheet={sheet}
+        waiting={waiting.length}
+        left={lines.filter((line) => !hasFigure(line)).length}
+        unreadable={lines.filter(({ id }) => unreadable.includes(id))}
+        onMend={focusOn}
+        send={() => requireAllArrived({ person, countId: sheet.id }, send)}
+      />
     </div>
   );
-}
-
-/** A line as this device knows it: what was typed here and is still on its way counts. */
-function asTyped(
-  line: StockCount['lines'][number],
-  waiting: readonly WaitingEntry[],
-): StockCount['lines'][number] {
-  const waits = waiting.find((each) => each.lineId === line.id);
-  if (!waits) return line;
-  const { areaMm2 = null, quantity = null, unmeasured = false } = waits.entry;
-  return { ...line, countedAreaMm2: areaMm2, countedQuantity: quantity, unmeasured };
 }
 
 /** From a tag to its line, which is added where it was not on the sheet. */

@@ -1,7 +1,8 @@
-import type { StockCount } from '@hidewright/contract';
+import type { CountLine, StockCount } from '@hidewright/contract';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
+import { Notice } from '../../../components/notice.tsx';
 import { say } from '../../../components/toast.ts';
 import { useHandInCount } from '../counts.mutations.ts';
 
@@ -9,14 +10,27 @@ interface HandInProps {
   sheet: StockCount;
   /** How many figures have not arrived yet. */
   waiting: number;
+  /** How many lines have no figure, also none on its way. */
+  left: number;
+  /** Lines on which something stands that is no figure. */
+  unreadable: readonly CountLine[];
+  onMend: (lineId: number) => void;
+  /** Sends all figures, and throws where one has not arrived. */
   send: () => Promise<void>;
 }
 
 /** The end of a sheet: how far it is, and giving it to the owner. */
-export function HandIn({ sheet, waiting, send }: HandInProps) {
+export function HandIn({ sheet, waiting, left, unreadable, onMend, send }: HandInProps) {
   const [asking, setAsking] = useState(false);
+  const [stopped, setStopped] = useState(false);
   const handIn = useHandInCount();
-  const left = sheet.lineCount - sheet.countedCount;
+
+  function ask() {
+    const [first] = unreadable;
+    setStopped(first !== undefined);
+    if (first) onMend(first.id);
+    else setAsking(true);
+  }
 
   async function confirm() {
     await send();
@@ -30,9 +44,14 @@ export function HandIn({ sheet, waiting, send }: HandInProps) {
         <strong>{`${sheet.countedCount} of ${sheet.lineCount}`}</strong> counted
         {waiting > 0 && `, ${waiting} on this device waiting to be sent`}
       </p>
-      <Button tone="primary" size="bench" onClick={() => setAsking(true)}>
+      <Button tone="primary" size="bench" onClick={ask}>
         Hand it in
       </Button>
+      {stopped && unreadable.length > 0 && (
+        <Notice tone="danger" live className="basis-full">
+          {`What stands at ${unreadable.map(({ tag }) => tag).join(', ')} is no figure. Mend or empty it, then hand the sheet in.`}
+        </Notice>
+      )}
       <ConfirmDialog
         open={asking}
         onOpenChange={setAsking}
