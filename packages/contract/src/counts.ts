@@ -224,9 +224,10 @@ export const countAgain = endpoint({
 export const approveCount = endpoint({
   method: 'POST',
   path: '/counts/{id}/approval',
-  summary: 'Approve a sheet: its differences become movements, all or none',
+  summary: 'Approve a sheet as it was read: its differences become movements, all or none',
   access: ['owner'],
   creates: true,
+  edits: true,
   params: idParams,
   body: z.strictObject({}),
   reply: stockCount,

@@ -1,4 +1,5 @@
 import { countOutcome } from '@hidewright/domain';
+import { requireVersion } from '../http/conditions.ts';
 import { wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import type { CountLine } from '../modules/counts/count-line.entity.ts';
@@ -13,11 +14,16 @@ import { settle } from './hand-in-count.ts';
 
 /**
  * Posts the differences of a sheet as movements, and hangs where it was found what was found elsewhere.
- * @throws {Problem} 404, 409 when it is not handed in, or what happened since makes a line meaningless
+ * @throws {Problem} 404, 409 when it is not handed in, or what happened since makes a line meaningless, 412 when it
+ * was counted again after it was read
  */
-export async function approveCount(work: Work, id: number): Promise<void> {
+export async function approveCount(
+  work: Work,
+  { id, ifMatch }: { id: number; ifMatch: number },
+): Promise<void> {
   const sheet = await findCount(work.em, id);
   requireCountState(sheet, 'handed in');
+  await requireVersion(work.em, { kind: 'count', id, version: sheet.version }, ifMatch);
   const lines = await linesOf(work.em, id);
   let posted = 0;
   for (const line of lines) {

@@ -39,8 +39,14 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
     }
   }
 
+  function change(next: boolean) {
+    // Asked again, it starts afresh.
+    setProblem(undefined);
+    onOpenChange(next);
+  }
+
   return (
-    <AlertDialog.Root open={open} onOpenChange={onOpenChange}>
+    <AlertDialog.Root open={open} onOpenChange={change}>
       <AlertDialog.Portal>
         <AlertDialog.Backdrop className={dialogLook.backdrop} />
         <AlertDialog.Popup className={dialogLook.popup}>

@@ -57,8 +57,8 @@ export function countRoutes(context: Context): Router {
     return describeCount(work, params.id);
   });
 
-  serve(router, context, approveEndpoint, async (work, { params }) => {
-    await approveCount(work, params.id);
+  serve(router, context, approveEndpoint, async (work, { params, ifMatch }) => {
+    await approveCount(work, { id: params.id, ifMatch });
     return describeCount(work, params.id);
   });
 

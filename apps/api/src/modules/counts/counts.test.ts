@@ -51,7 +51,11 @@ const enter = (
 const handIn = (id: number, leaveUncounted = false) =>
   shop.as('maker').post(`/api/counts/${id}/handing-in`).send({ leaveUncounted });
 const read = async (id: number) => (await shop.as('owner').get(`/api/counts/${id}`)).body;
-const approve = (id: number) => shop.as('owner').post(`/api/counts/${id}/approval`).send({});
+const approveAsRead = (id: number, version: number) =>
+  shop.as('owner').post(`/api/counts/${id}/approval`).set('If-Match', `"${version}"`).send({});
+/** Approves it as it now stands. */
+const approved = async (id: number, status = 201) =>
+  approveAsRead(id, (await read(id)).version as number).expect(status);
 const lotOf = async (line: Line | undefined) =>
   (await shop.as('owner').get(`/api/lots/${line?.lotId}`).expect(200)).body;
 
@@ -92,8 +96,8 @@ describe('a count', () => {
     const sheet = await read(id);
     expect(sheet).toMatchObject({ state: 'handed in', differenceValue: '-9.00' });
     await shop.as('maker').post(`/api/counts/${id}/approval`).send({}).expect(403);
-    expect((await approve(id).expect(201)).body).toMatchObject({ state: 'approved' });
-    const again = await approve(id).expect(409);
+    expect((await approved(id)).body).toMatchObject({ state: 'approved' });
+    const again = await approved(id, 409);
     expect(again.body.detail).toContain('was approved by The owner');
     const { body } = await shop
       .as('owner')
@@ -123,7 +127,7 @@ describe('a count', () => {
     const more = [{ hardwareId, quantity: 100 }];
     await shop.as('owner').post('/api/receipts').send({ hardware: more }).expect(201);
     await handIn(id, true).expect(201);
-    await approve(id).expect(201);
+    await approved(id);
     const { body } = await shop.as('owner').get(`/api/hardware/${hardwareId}`).expect(200);
     expect(body.onHand).toBe(580);
   });
@@ -137,7 +141,7 @@ describe('a count', () => {
     shop.clock.set(new Date(shop.clock.now().getTime() + 60_000));
     await enter(id, line, { quantity: 49, secondsAgo: 300 }).expect(200);
     await handIn(id, true).expect(201);
-    await approve(id).expect(201);
+    await approved(id);
     const { body } = await shop.as('owner').get(`/api/hardware/${hardwareId}`).expect(200);
     expect(body.onHand).toBe(79);
   });
@@ -151,7 +155,7 @@ describe('a count', () => {
     await enter(id, line, { quantity: 70 }).expect(200);
     await handIn(id, true).expect(201);
     expect((await read(id)).broken).toMatchObject([{ jobId, hardwareId, quantity: 80 }]);
-    await approve(id).expect(201);
+    await approved(id);
   });
 
   it('says whose figure was replaced when two count one sheet', async () => {
@@ -179,7 +183,7 @@ describe('a count', () => {
     await add('nothing-of-ours').expect(404);
     await enter(here.id, body.line, { unmeasured: true }).expect(200);
     await handIn(here.id, true).expect(201);
-    await approve(here.id).expect(201);
+    await approved(here.id);
     expect(await lotOf(elsewhere.lines[0])).toMatchObject({ place: here.place });
   });
 
@@ -194,9 +198,29 @@ describe('a count', () => {
     expect(sheet.lines[0]).toMatchObject({ again: true, countedAreaMm2: null, bookAreaMm2: null });
     await enter(id, lines[0], { areaMm2: ft2(20) }).expect(200);
     await handIn(id).expect(201);
-    await approve(id).expect(201);
+    await approved(id);
     expect(await lotOf(lines[0])).toMatchObject({ onHandAreaMm2: ft2(20) });
     expect(await lotOf(lines[1])).toMatchObject({ onHandAreaMm2: ft2(10) });
+  });
+
+  it('is approved only as it was read, so that nobody posts figures unseen', async () => {
+    const { id, lines } = await sheetOf(20);
+    await enter(id, lines[0], { areaMm2: ft2(19) }).expect(200);
+    await handIn(id).expect(201);
+    const seen = (await read(id)).version as number;
+    const lineIds = [lines[0]?.id];
+    await shop.as('owner').post(`/api/counts/${id}/recounts`).send({ lineIds }).expect(201);
+    expect((await approveAsRead(id, seen).expect(409)).body.detail).toContain(
+      'still being counted',
+    );
+    await enter(id, lines[0], { areaMm2: ft2(2) }).expect(200);
+    await handIn(id).expect(201);
+    const { body } = await approveAsRead(id, seen).expect(412);
+    expect(body.changed).toMatchObject({ by: 'The maker' });
+    await shop.as('owner').post(`/api/counts/${id}/approval`).send({}).expect(428);
+    expect(await lotOf(lines[0])).toMatchObject({ onHandAreaMm2: ft2(20) });
+    await approved(id);
+    expect(await lotOf(lines[0])).toMatchObject({ onHandAreaMm2: ft2(2) });
   });
 
   it('is not approved over a later count or adjustment of the same thing, and then posts nothing', async () => {
@@ -206,7 +230,7 @@ describe('a count', () => {
     shop.clock.set(new Date(shop.clock.now().getTime() + 1000));
     const adjust = { of: 'lot', lotId: lines[1]?.lotId, areaMm2: ft2(11), reason: 'measured' };
     await shop.as('owner').post('/api/adjustments').send(adjust).expect(201);
-    const { body } = await approve(id).expect(409);
+    const { body } = await approved(id, 409);
     expect(body.detail).toMatch(/^Lot T-\d+ was counted or adjusted elsewhere after that/);
     expect(await lotOf(lines[0])).toMatchObject({ onHandAreaMm2: ft2(20) });
     expect(await read(id)).toMatchObject({ state: 'handed in' });
@@ -218,7 +242,7 @@ describe('a count', () => {
     await enter(id, lines[0], { areaMm2: '0' }).expect(200);
     expect((await handIn(id).expect(409)).body.detail).toContain('1 line is not counted yet');
     await handIn(id, true).expect(201);
-    await approve(id).expect(201);
+    await approved(id);
     expect(await lotOf(lines[0])).toMatchObject({ onHandAreaMm2: '0', valueOnHand: '0.00' });
     expect(await lotOf(lines[1])).toMatchObject({ onHandAreaMm2: ft2(22) });
     await enter(id, lines[1], { areaMm2: ft2(1) }).expect(409);
@@ -288,7 +312,7 @@ describe('a count', () => {
     ]);
     await enter(sheet.id, sheet.lines[2], { quantity: 12 }).expect(200);
     await handIn(sheet.id, true).expect(201);
-    await approve(sheet.id).expect(201);
+    await approved(sheet.id);
     const { body: counted } = await shop.as('owner').get(`/api/hardware/${near}`).expect(200);
     expect(counted).toMatchObject({ onHand: 12, bin: 'Beech drawer' });
 

@@ -26,7 +26,7 @@ const lotIds: number[] = [];
 const orderIds: number[] = [];
 /** Orders that have a lot worked on. */
 const workIds: number[] = [];
-/** Things of which an honest count said that less is there than is held. */
+/** Things of which an honest count said that less is there than is held, until enough is there again. */
 const broken = new Set<string>();
 const names = { owner: 'The owner', maker: 'The maker' };
 
@@ -56,8 +56,13 @@ const ft2 = (quarters: number) => ((quarters * footage) / 4).toFixed(2);
 const pick = <T>(from: readonly T[], at: number): T => from[at % from.length] as T;
 
 /** The reply of what went well; undefined where it was refused, which is an answer as well. */
-async function send(role: Role, path: string, body: object): Promise<object | undefined> {
-  const reply = await ready.shop.as(role).post(`/api${path}`).send(body);
+async function send(
+  role: Role,
+  path: string,
+  body: object,
+  headers: Record<string, string> = {},
+): Promise<object | undefined> {
+  const reply = await ready.shop.as(role).post(`/api${path}`).set(headers).send(body);
   if (reply.status >= 500) throw new Error(`${path}: ${reply.status} ${reply.text}`);
   return reply.status < 300 ? (reply.body as object) : undefined;
 }
@@ -217,8 +222,9 @@ const commands = {
   approve: async (): Promise<Role> => {
     const sheet = await openSheet('handed in');
     if (sheet) {
-      noteBroken(sheet.broken ?? []);
-      await send('owner', `/counts/${sheet.id}/approval`, {});
+      const asRead = { 'If-Match': `"${sheet.version}"` };
+      const approved = await send('owner', `/counts/${sheet.id}/approval`, {}, asRead);
+      if (approved !== undefined) noteBroken(sheet.broken ?? []);
     }
     return 'owner';
   },

@@ -2,7 +2,7 @@ import { approveCount } from '../../flows/approve-count.ts';
 import { enterCount } from '../../flows/enter-count.ts';
 import { handInCount } from '../../flows/hand-in-count.ts';
 import { openCount } from '../../flows/open-count.ts';
-import { linesOf } from '../../modules/counts/find-count.ts';
+import { findCount, linesOf } from '../../modules/counts/find-count.ts';
 import { freeOf } from '../../modules/stock/stock-ledger.ts';
 import { itemOf } from '../../modules/stock/stock-item.ts';
 import type { Work } from '../../work.ts';
@@ -17,7 +17,7 @@ export function planCounts(shop: DemoShop, year: Year): void {
       supplies = await countSupplies(work);
     }),
   );
-  year.plan(24, '16:40', () => shop.as('owner', (work) => approveCount(work, supplies)));
+  year.plan(24, '16:40', () => shop.as('owner', (work) => approveIt(work, supplies)));
   year.plan(0, '07:20', () => shop.as('maker', countSomeOfTheRack));
 }
 
@@ -31,6 +31,11 @@ async function countSupplies(work: Work): Promise<number> {
   }
   await handInCount(work, id, false);
   return id;
+}
+
+async function approveIt(work: Work, id: number): Promise<void> {
+  const { version } = await findCount(work.em, id);
+  await approveCount(work, { id, ifMatch: version });
 }
 
 async function countSomeOfTheRack(work: Work): Promise<void> {

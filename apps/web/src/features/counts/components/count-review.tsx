@@ -1,18 +1,23 @@
 import type { CountLine, StockCount } from '@hidewright/contract';
+import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { say } from '../../../components/toast.ts';
+import { ApiProblem } from '../../../lib/api-problem.ts';
 import { moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useApproveCount, useCountAgain } from '../counts.mutations.ts';
+import { countQuery } from '../counts.queries.ts';
 import { CountLinesTable } from './count-lines-table.tsx';
 
 /** What was counted against the books: look, have lines counted again, approve. */
 export function CountReview({ sheet, isOwner }: { sheet: StockCount; isOwner: boolean }) {
   const [again, setAgain] = useState<readonly number[]>([]);
-  const [asking, setAsking] = useState(false);
+  /** The version that the question is about: what comes in meanwhile was not looked at. */
+  const [asking, setAsking] = useState<number>();
+  const client = useQueryClient();
   const recount = useCountAgain();
   const approve = useApproveCount();
   const { currency } = useWorkshop();
@@ -24,6 +29,18 @@ export function CountReview({ sheet, isOwner }: { sheet: StockCount; isOwner: bo
     await recount.mutateAsync({ params, body: { lineIds: [...again] } });
     setAgain([]);
     say(`${sheet.title} is back for counting.`);
+  }
+
+  async function approveIt() {
+    try {
+      await approve.mutateAsync({ params, body: {}, ifMatch: asking });
+      say(`${sheet.title} is approved.`);
+    } catch (refusal) {
+      // Behind the question stands what is to be looked at now.
+      if (refusal instanceof ApiProblem && refusal.status === 412)
+        await client.invalidateQueries({ queryKey: countQuery(sheet.id).queryKey });
+      throw refusal;
+    }
   }
 
   return (
@@ -46,20 +63,17 @@ export function CountReview({ sheet, isOwner }: { sheet: StockCount; isOwner: bo
               ? 'Tick lines to count again'
               : `Count ${lineWord(again.length)} again`}
           </Button>
-          <Button tone="primary" className="min-h-11" onClick={() => setAsking(true)}>
+          <Button tone="primary" className="min-h-11" onClick={() => setAsking(sheet.version)}>
             Approve
           </Button>
         </div>
       )}
       <ConfirmDialog
-        open={asking}
-        onOpenChange={setAsking}
+        open={asking !== undefined}
+        onOpenChange={() => setAsking(undefined)}
         title={`Approve ${sheet.title}?`}
         confirmWord="Approve it"
-        onConfirm={async () => {
-          await approve.mutateAsync({ params, body: {} });
-          say(`${sheet.title} is approved.`);
-        }}
+        onConfirm={approveIt}
       >
         {differences === 0
           ? 'Everything is as the books say; nothing moves.'
