@@ -38,7 +38,8 @@ export function lotRoutes(context: Context): Router {
   serve(router, context, changeLot, async (work, { params, body, ifMatch }) => {
     const lot = await findLot(work.em, params.id);
     await requireVersion(work.em, { kind: 'lot', id: lot.id, version: lot.version }, ifMatch);
-    if (body.tag !== undefined) await requireFreeTag(work.em, body.tag, 'tag', lot.id);
+    if (body.tag !== undefined && body.tag !== lot.tag)
+      await requireFreeTag(work.em, body.tag, 'tag', lot.id);
     const { weightOz, ...others } = body;
     assignDefined(lot, others);
     if (weightOz !== undefined) lot.weightOz = weightOz === null ? null : new Decimal(weightOz);

@@ -46,9 +46,31 @@ describe('a scan', () => {
     }
   });
 
-  it('never lets a lot hang by the tag of a bin', async () => {
-    const change = shop.as('owner').patch(`/api/lots/${lot.id}`).set('If-Match', '"1"');
-    const { body } = await change.send({ tag: 'b-0007' }).expect(422);
-    expect(body.errors[0]).toMatchObject({ field: 'tag' });
+  it.each(['b-0007', 'P-0001', 'p-0900', 'J-0012', 'O-0003', 'Q-0241', 'I-1'])(
+    'never lets a lot hang by %s, which a bin or a paper goes by',
+    async (tag) => {
+      const change = shop.as('owner').patch(`/api/lots/${lot.id}`).set('If-Match', '"1"');
+      const { body } = await change.send({ tag }).expect(422);
+      expect(body.errors).toMatchObject([{ field: 'tag' }]);
+      const side = { leatherId: things.leatherId, form: 'side', measuredAreaMm2: ft2(22) };
+      const lots = [{ ...side, tag }];
+      const came = await shop.as('owner').post('/api/receipts').send({ lots }).expect(422);
+      expect(came.body.errors).toMatchObject([{ field: 'lots.0.tag' }]);
+    },
+  );
+
+  it('never has to choose between two lots that differ in capitals alone', async () => {
+    const side = { leatherId: things.leatherId, form: 'side', measuredAreaMm2: ft2(22) };
+    const hang = (...tags: string[]) =>
+      shop
+        .as('owner')
+        .post('/api/receipts')
+        .send({ lots: tags.map((tag) => ({ ...side, tag })) });
+    await hang(lot.tag.toLowerCase()).expect(422);
+    await hang('Loft 1', 'LOFT 1').expect(422);
+    const { body } = await hang('t-0002', '').expect(201);
+    expect(body.lots).toMatchObject([{ tag: 't-0002' }, { tag: 'T-0003' }]);
+    const own = shop.as('owner').patch(`/api/lots/${body.lots[0].id}`).set('If-Match', '"1"');
+    await own.send({ tag: 'T-0002' }).expect(200);
   });
 });
