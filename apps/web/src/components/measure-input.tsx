@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { useController } from 'react-hook-form';
+import { unclearComma } from '../lib/comma.ts';
 import { isFigure } from '../lib/units.ts';
 import { describedBy, Field, type FieldLabels } from './field.tsx';
 import { InputFrame, inputLook } from './input-frame.tsx';
@@ -17,10 +18,12 @@ interface MeasureInputProps extends FieldLabels {
 
 /** A measure that is typed in the shop's unit, as people write it, and travels in the contract's. */
 export function MeasureInput({ name, unit, whenEmpty, read, show, ...labels }: MeasureInputProps) {
-  const { id, control, error } = useField(name);
+  const { id, control, error: found } = useField(name);
   const { field } = useController({ name, control });
   const [typed, setTyped] = useState<{ text: string; value: unknown }>();
   const shown = typed && typed.value === field.value ? typed.text : shownValue(field.value, show);
+
+  const error = found && (unclearComma(shown) ?? found);
 
   function type(text: string) {
     const empty = emptied(whenEmpty ?? (labels.optional ? 'absent' : 'text'));

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { readWhole } from '../lib/comma.ts';
 import { describedBy, Field, type FieldLabels } from './field.tsx';
 import { InputFrame, inputLook } from './input-frame.tsx';
 import { emptied, useField, type WhenEmpty } from './use-field.ts';
@@ -14,8 +15,9 @@ export function NumberField({ name, unit, whenEmpty = 'absent', ...labels }: Num
   const { id, register, error } = useField(name);
   const read = (value: unknown) => {
     if (value === '' || value === undefined || value === null) return emptied(whenEmpty);
-    const text = String(value).trim().replaceAll(',', '');
-    return /^-?\d{1,15}$/.test(text) ? Number(text) : value;
+    const text = String(value).trim();
+    const whole = readWhole(text) ?? text;
+    return /^-?\d{1,15}$/.test(whole) ? Number(whole) : value;
   };
   return (
     <Field id={id} error={error} {...labels}>

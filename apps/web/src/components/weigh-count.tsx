@@ -1,5 +1,6 @@
 import { countByWeight, InvalidInput, type WeighedCount } from '@hidewright/domain';
 import { useState } from 'react';
+import { unclearComma, withPoint } from '../lib/comma.ts';
 import { countText } from '../lib/formatting.ts';
 import { Button } from './button.tsx';
 import { PlainField } from './plain-field.tsx';
@@ -62,7 +63,9 @@ type Found = WeighedCount | { field: string; sentence: string } | Record<string,
 
 /** Nothing is said while something is still to be typed. */
 function read(typed: Typed): Found {
-  const text = (name: keyof Typed) => typed[name].trim().replace(',', '.');
+  const unclear = fields.find(({ name }) => unclearComma(typed[name]) !== undefined);
+  if (unclear) return { field: unclear.name, sentence: unclearComma(typed[unclear.name]) ?? '' };
+  const text = (name: keyof Typed) => withPoint(typed[name]);
   if (fields.some(({ name }) => text(name) === '')) return {};
   try {
     return countByWeight({

@@ -23,7 +23,7 @@ describe('what a person types for a measure', () => {
     expect(readMixedNumber(text)?.toFixed()).toBe(figure);
   });
 
-  it.each(['', '-1', '1/0', 'NaN', '1e3', '24 ¾ ¾', 'eleven', '0x10', 'Infinity'])(
+  it.each(['', '-1', '1/0', 'NaN', '1e3', '24 ¾ ¾', 'eleven', '0x10', 'Infinity', '1,250'])(
     'refuses %s',
     (text) => {
       expect(readMixedNumber(text)).toBeUndefined();

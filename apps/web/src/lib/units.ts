@@ -1,5 +1,6 @@
 import { convert } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
+import { withPoint } from './comma.ts';
 import type { Workshop } from './workshop.tsx';
 
 export type AreaUnit = Workshop['areaUnit'];
@@ -31,9 +32,9 @@ const fractions: Record<string, string> = {
   '³': '0.75',
 };
 
-/** Reads 24.75, 24¾, 24³, 24 3/4 and ¾; nothing that is negative or unclear. */
+/** Reads 24.75, 24,75, 24¾, 24³, 24 3/4 and ¾; nothing that is negative or unclear, as 1,250 is. */
 export function readMixedNumber(text: string): Decimal | undefined {
-  const plain = text.trim().replace(',', '.');
+  const plain = withPoint(text);
   if (/^\d{1,7}(\.\d{1,6})?$/.test(plain)) return new Decimal(plain);
   const sign = /^(\d{0,7})\s*([¼½¾⅛⅜⅝⅞⁰¹²³])$/.exec(plain);
   if (sign) return new Decimal(sign[1] || '0').plus(fractions[sign[2] ?? ''] ?? '0');

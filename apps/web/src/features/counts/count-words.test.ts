@@ -12,8 +12,13 @@ describe('what is typed while counting', () => {
 
   it('is a whole number of pieces of hardware', () => {
     expect(readEntry(' 1,200 ', false, 'ft2')).toEqual({ quantity: 1200 });
-    for (const wrong of ['-1', '1.5', 'many', '123456789'])
+    for (const wrong of ['-1', '1.5', '12,5', '1,2', 'many', '123456789'])
       expect(readEntry(wrong, false, 'ft2')).toMatch(/^Enter how many/);
+  });
+
+  it('is asked about where its comma may mean either', () => {
+    expect(readEntry('1,250', true, 'ft2')).toBe('Write 1250 or 1.25: 1,250 may mean either.');
+    expect(readEntry('24,75', true, 'ft2')).toEqual({ areaMm2: '2299350.24' });
   });
 
   it('takes the count away when it is emptied', () => {

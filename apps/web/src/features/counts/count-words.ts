@@ -1,4 +1,5 @@
 import type { CountLine } from '@hidewright/contract';
+import { readWhole, unclearComma } from '../../lib/comma.ts';
 import { areaText, countText } from '../../lib/formatting.ts';
 import { areaFigure, areaUnits, readArea, type AreaUnit } from '../../lib/units.ts';
 import type { Entry } from './entry-outbox.ts';
@@ -18,11 +19,12 @@ export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry |
   if (ofLot) {
     const areaMm2 = readArea(typed, unit);
     return areaMm2 === undefined
-      ? `Enter the area in ${areaUnits[unit].sign}, such as 24.75 or 24³; 0 when it is gone.`
+      ? (unclearComma(typed) ??
+          `Enter the area in ${areaUnits[unit].sign}, such as 24.75 or 24³; 0 when it is gone.`)
       : { areaMm2 };
   }
-  const plain = typed.replaceAll(',', '');
-  return /^\d{1,8}$/.test(plain)
+  const plain = readWhole(typed);
+  return plain !== undefined && plain.length <= 8
     ? { quantity: Number(plain) }
     : 'Enter how many pieces there are; 0 when there are none.';
 }

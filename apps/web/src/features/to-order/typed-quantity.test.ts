@@ -15,7 +15,7 @@ it('sends what nobody touched exactly', () => {
   expect(readQuantity('24³', side, workshop)).toBe('2299350.24');
 });
 
-it.each(['', '0', '-4', '1.5', 'ten'])('takes %j for no quantity', (text) => {
+it.each(['', '0', '-4', '1.5', '12,5', 'ten'])('takes %j for no quantity', (text) => {
   expect(readQuantity(text, rivets, workshop)).toBeUndefined();
 });
 

@@ -1,4 +1,5 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
+import { readWhole } from '../../lib/comma.ts';
 import { areaFigure, areaUnits, readArea } from '../../lib/units.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
@@ -17,8 +18,8 @@ export function readQuantity(text: string, item: Item, workshop: Workshop): stri
   // What nobody touched is sent exactly, not as it was rounded for the eye.
   if (text === proposedText(item, workshop)) return proposed(item);
   if (item.of === 'leather') return above0(readArea(text, workshop.areaUnit));
-  const plain = text.trim().replaceAll(',', '');
-  return /^\d{1,8}$/.test(plain) ? above0(String(Number(plain))) : undefined;
+  const plain = readWhole(text);
+  return plain !== undefined && plain.length <= 8 ? above0(String(Number(plain))) : undefined;
 }
 
 const above0 = (text: string | undefined): string | undefined =>
