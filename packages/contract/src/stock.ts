@@ -106,9 +106,18 @@ export const adjustStock = endpoint({
         of: z.literal('lot'),
         lotId: id,
         areaMm2: areaMm2.refine(fitsARack, 'Enter at most 100,000 ft².'),
+        /** What the books said when it was measured: refused where something moved since. */
+        onHandSeenAreaMm2: areaMm2.optional(),
         reason,
       }),
-      z.strictObject({ of: z.literal('hardware'), hardwareId: id, counted: count, reason }),
+      z.strictObject({
+        of: z.literal('hardware'),
+        hardwareId: id,
+        counted: count,
+        /** What the books said when it was counted: refused where something moved since. */
+        onHandSeenQuantity: count.optional(),
+        reason,
+      }),
     ],
     'Choose a lot, or hardware.',
   ),

@@ -7,8 +7,10 @@ import { readMovements, readReservations } from '../modules/stock/read-ledger.ts
 import type { StockItem } from '../modules/stock/stock-item.ts';
 import { adjustStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
+import { requireOnHand } from './moved-since.ts';
 
-/** Sets the books to what was measured or counted on the rack, and says which jobs that leaves short. */
+/** Sets the books to what was measured or counted on the rack, and says which jobs that leaves short. Nothing is set over
+ * what moved since the books were looked at. */
 export async function adjustToCount(
   work: Work,
   asked: BodyOf<typeof endpoint>,
@@ -16,6 +18,8 @@ export async function adjustToCount(
   const item: StockItem =
     asked.of === 'lot' ? { lotId: asked.lotId } : { hardwareId: asked.hardwareId };
   const counted = asked.of === 'lot' ? scaled(new Decimal(asked.areaMm2), 3) : asked.counted;
+  const seen = seenOf(asked);
+  if (seen !== undefined) await requireOnHand(work, item, seen);
   const { name, say } = await describeItem(work.em, item);
   const { movement, broken } = await adjustStock(work, { ...item, counted, reason: asked.reason });
   await logDeed(work, {
@@ -40,6 +44,13 @@ export async function adjustToCount(
         ? []
         : await readReservations(work.em, { ...askedItem(item), limit: broken.length }),
   };
+}
+
+function seenOf(asked: BodyOf<typeof endpoint>): number | undefined {
+  if (asked.of === 'hardware') return asked.onHandSeenQuantity;
+  return asked.onHandSeenAreaMm2 === undefined
+    ? undefined
+    : scaled(new Decimal(asked.onHandSeenAreaMm2), 3);
 }
 
 const askedItem = (item: StockItem) => ({

@@ -263,6 +263,29 @@ describe('adjusting', () => {
     expect(onRack.body.items).toEqual([]);
   });
 
+  it('sets nothing over what moved since it was measured, and says what', async () => {
+    const received = await receive({ lots: [side()] }).expect(201);
+    const lotId = received.body.lots[0].id;
+    const books = received.body.lots[0].onHandAreaMm2 as string;
+    const measured = { of: 'lot', lotId, reason: 'Measured', onHandSeenAreaMm2: books };
+    await adjust({ ...measured, areaMm2: ft2(20) }, 'owner').expect(201);
+    const late = await adjust({ ...measured, areaMm2: ft2(24) }).expect(409);
+    expect(late.body.detail).toMatch(/^Lot T-\d+ has moved since you looked/);
+    expect(late.body.detail).toContain('The owner adjusted it by −4.75 ft² (Measured)');
+    expect(late.body.detail).toContain('The books say 20 ft² now, not 24.75 ft².');
+    const lot = await shop.as('owner').get(`/api/lots/${lotId}`).expect(200);
+    expect(lot.body.onHandAreaMm2).toBe(ft2(20).replace(/\.?0+$/, ''));
+
+    await receive({ hardware: [rivets(100)] }).expect(201);
+    const { onHand } = await counts();
+    const counted = { of: 'hardware', hardwareId: things.hardwareId, reason: 'Counted' };
+    await receive({ hardware: [rivets(25)] }).expect(201);
+    const blind = { ...counted, counted: onHand - 3, onHandSeenQuantity: onHand };
+    const { body } = await adjust(blind).expect(409);
+    expect(body.detail).toContain('received 25');
+    await adjust({ ...blind, onHandSeenQuantity: onHand + 25 }).expect(201);
+  });
+
   it('names the jobs that a count leaves short', async () => {
     const job = await writeBareJob(shop.context, things.hardwareId);
     await receive({ hardware: [rivets(100)] }).expect(201);

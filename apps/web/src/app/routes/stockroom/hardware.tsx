@@ -65,7 +65,12 @@ export function Component() {
               </Card>
             )}
             {!isKit && (
-              <HeldAndAdjust item={item} unit={hardware.unit} handlesStock={handlesStock} />
+              <HeldAndAdjust
+                item={item}
+                onHand={hardware.onHand}
+                unit={hardware.unit}
+                handlesStock={handlesStock}
+              />
             )}
           </>
         }

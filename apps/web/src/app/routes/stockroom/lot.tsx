@@ -66,7 +66,7 @@ export function Component() {
             <LotFacts lot={lot} />
           </Card>
         }
-        aside={<HeldAndAdjust item={item} handlesStock={handlesStock} />}
+        aside={<HeldAndAdjust item={item} onHand={lot.onHandAreaMm2} handlesStock={handlesStock} />}
       >
         {handlesStock && lot.form !== 'panel' && lot.form !== 'strip' && (
           <>

@@ -1,12 +1,14 @@
-import { adjustStock, type ReplyOf } from '@hidewright/contract';
+import { adjustStock, type BodyInputOf, type ReplyOf } from '@hidewright/contract';
 import { unitWord, type HardwareUnit } from '@hidewright/domain';
-import { useState, type ReactNode } from 'react';
+import { useQueryClient } from '@tanstack/react-query';
+import { useRef, useState, type ReactNode } from 'react';
 import { AreaField } from '../../../components/area-field.tsx';
 import { Form } from '../../../components/form.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { say } from '../../../components/toast.ts';
+import { ApiProblem } from '../../../lib/api-problem.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { signedText } from '../movement-words.ts';
 import { useAdjustStock } from '../stock.mutations.ts';
@@ -17,17 +19,39 @@ type Adjusted = ReplyOf<typeof adjustStock>;
 
 interface AdjustFormProps {
   item: { of: 'lot'; lotId: number } | { of: 'hardware'; hardwareId: number };
+  /** What the books say as the page shows it: mm² of a lot, else a count. */
+  onHand: string | number;
   /** What one of the hardware is. */
   unit?: HardwareUnit | undefined;
 }
 
 /** Sets the books to what is really there, and says which jobs that leaves short. */
-export function AdjustForm({ item, unit = 'piece' }: AdjustFormProps) {
+export function AdjustForm({ item, onHand, unit = 'piece' }: AdjustFormProps) {
   const adjust = useAdjustStock();
   const [done, setDone] = useState<Adjusted>();
   const workshop = useWorkshop();
+  const client = useQueryClient();
+  // What stood there when the first figure was typed; the page may be read again meanwhile.
+  const seen = useRef<string | number>(undefined);
+
+  async function set(body: BodyInputOf<typeof adjustStock>) {
+    try {
+      const now = await adjust.mutateAsync({
+        body: { ...body, ...seenFields(item, seen.current ?? onHand) },
+      });
+      seen.current = undefined;
+      return now;
+    } catch (refusal) {
+      if (refusal instanceof ApiProblem && refusal.status === 409) {
+        await client.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== 'session' });
+        seen.current = undefined;
+      }
+      throw refusal;
+    }
+  }
+
   return (
-    <div className="space-y-4">
+    <div className="space-y-4" onInput={() => (seen.current ??= onHand)}>
       {done && done.broken.length > 0 && <LeftShort done={done} />}
       <Form
         schema={adjustStock.body}
@@ -36,7 +60,7 @@ export function AdjustForm({ item, unit = 'piece' }: AdjustFormProps) {
         submitTone="secondary"
         again
         onSend={async (body) => {
-          const now = await adjust.mutateAsync({ body });
+          const now = await set(body);
           setDone(now);
           say(
             now.movement
@@ -61,6 +85,10 @@ export function AdjustForm({ item, unit = 'piece' }: AdjustFormProps) {
       </Form>
     </div>
   );
+}
+
+function seenFields({ of }: AdjustFormProps['item'], seen: string | number) {
+  return of === 'lot' ? { onHandSeenAreaMm2: String(seen) } : { onHandSeenQuantity: Number(seen) };
 }
 
 function blankFor(item: AdjustFormProps['item']) {
