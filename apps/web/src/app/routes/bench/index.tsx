@@ -86,7 +86,8 @@ function Finished({ jobs }: { jobs: readonly JobCard[] }) {
       <summary className="mb-2 min-h-11 py-2 font-semibold">
         Finished or cancelled lately ({jobs.length})
       </summary>
-      <JobTickets title="Finished" jobs={jobs} />
+      <JobTickets title="Finished" jobs={jobs.filter((job) => !job.cancelled)} />
+      <JobTickets title="Cancelled" jobs={jobs.filter((job) => job.cancelled)} />
     </details>
   );
 }

@@ -25,9 +25,9 @@ function BringBack({ what, form }: { what: string; form: (onDone: () => void) =>
   return (
     <>
       <Button className="min-h-11 print:hidden" onClick={() => setOpen(true)}>
-        Bring back<span className="sr-only"> of {what}</span>
+        Bring back<span className="sr-only"> {what}</span>
       </Button>
-      <Dialog open={open} onOpenChange={setOpen} title={`Bring back of ${what}`}>
+      <Dialog open={open} onOpenChange={setOpen} title={`Bring back ${what}`}>
         {form(() => setOpen(false))}
       </Dialog>
     </>
@@ -40,7 +40,7 @@ export function BringLeatherBack({ job, lot }: { job: Job; lot: JobLot }) {
   const { mutateAsync } = useReturnFromJob();
   return (
     <BringBack
-      what={`lot ${lot.tag}`}
+      what={`to lot ${lot.tag}`}
       form={(onDone) => (
         <Form
           schema={ofLeather}

@@ -28,6 +28,7 @@ interface StockCardProps {
 export function StockCard({ job, canTake }: StockCardProps) {
   const workshop = useWorkshop();
   const cancelled = job.orderState === 'cancelled';
+  const lots = cancelled ? job.lots.filter(({ takenAreaMm2 }) => takenAreaMm2 !== '0') : job.lots;
   const givesBack = atWork.has(job.state) || (cancelled && job.state !== 'finished');
   const client = useQueryClient();
   const { mutate, isPending, error: notTaken, variables } = useTakeForJob();
@@ -65,7 +66,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
         </Notice>
       )}
       <ul aria-label="Lots" className="divide-y divide-stitch/60">
-        {job.lots.map((lot) => (
+        {lots.map((lot) => (
           <Line
             key={lot.lotId}
             title={<LotTitle lot={lot} />}
@@ -107,7 +108,8 @@ export function StockCard({ job, canTake }: StockCardProps) {
           </Line>
         ))}
       </ul>
-      {job.lots.length === 0 && (
+      {cancelled && lots.length === 0 && <p>No leather is left to bring back.</p>}
+      {!cancelled && job.lots.length === 0 && (
         <EmptyState title={`No ${job.leatherName} on the rack.`}>
           Receive a lot in the Stockroom, then take from it here.
         </EmptyState>

@@ -22,7 +22,7 @@ export function MoveDay({ order }: { order: Order }) {
   const [open, setOpen] = useState(false);
   return (
     <>
-      <Button onClick={() => setOpen(true)}>Move the promised day</Button>
+      <Button onClick={() => setOpen(true)}>Move the day</Button>
       <Dialog
         open={open}
         onOpenChange={setOpen}
