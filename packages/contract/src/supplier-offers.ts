@@ -19,6 +19,11 @@ const quantity = z
   .string()
   .trim()
   .refine((text) => areaMm2.safeParse(text).success, 'Enter a quantity, such as 100.')
+  // What to order reckons with no more.
+  .refine(
+    (text) => !(Number(text) > 1_000_000_000),
+    'Enter at most 1,000,000,000 pieces, or 10,763 ft² of leather.',
+  )
   .meta({ example: '100' });
 const above0 = (sentence: string) => quantity.refine((text) => Number(text) > 0, sentence);
 

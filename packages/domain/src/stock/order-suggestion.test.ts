@@ -35,6 +35,15 @@ describe('what to order', () => {
     expect(suggest({ drafted: 40 })).toMatchObject({ state: 'now', quantity: '100' });
   });
 
+  it('leaves a break out of the reckoning that nobody reaches, as older offers may hold', () => {
+    const terms = { ...rivets.terms, breaks: [{ from: '0', price: '0.11' }] };
+    const far = { ...terms, breaks: [...terms.breaks, { from: '1021933440', price: '0.05' }] };
+    const only = { ...terms, minimum: '1021933440', multiple: null, breaks: far.breaks.slice(1) };
+    const asked = { use: steady, minimum: 20, free: 60 };
+    expect(suggest({ ...asked, terms: far })).toEqual(suggest({ ...asked, terms }));
+    expect(suggest({ ...asked, terms: only })).toMatchObject({ economic: null });
+  });
+
   it('goes by use where that asks for more than the minimum', () => {
     // 70 a week without spread, a week's lead: the point is 70; a year is 3,650.
     const { point, pointBy, economic, quantity } = suggest({ use: steady, minimum: 20, free: 60 });

@@ -135,6 +135,9 @@ function usualOrder(input: OrderInput, missing: number) {
   return { usual, usualBy, usualPrice, usualCost, economic };
 }
 
+/** Beyond it nobody's use of a year lies, and a ladder of prices is refused. */
+const mostReckoned = 1_000_000_000;
+
 /** At most a year's use: what lies longer ages. */
 function economicOf({
   use,
@@ -144,11 +147,11 @@ function economicOf({
   pricedAmount,
 }: OrderInput): number | null {
   const demand = dailyUse(use) * 365;
-  const breaks = terms.breaks.map(({ from, price }) => ({
-    from: Math.ceil(Number(from)),
-    price,
-  }));
-  if (demand === 0 || breaks.some(({ price }) => Number(price) === 0)) return null;
+  const breaks = terms.breaks
+    .map(({ from, price }) => ({ from: Math.ceil(Number(from)), price }))
+    .filter(({ from }) => from <= mostReckoned);
+  if (demand === 0 || breaks.length === 0 || breaks.some(({ price }) => Number(price) === 0))
+    return null;
   // Every cost is multiplied by the priced amount, so that prices per ft² serve quantities in mm².
   const scaledCost = toText(new Exact(orderCost).times(pricedAmount));
   const { quantity } = orderQuantity({ demand, orderCost: scaledCost, holdingRate, breaks });
