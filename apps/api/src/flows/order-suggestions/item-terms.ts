@@ -18,8 +18,8 @@ export interface ItemTerms {
 }
 
 /**
- * The offer that is preferred, or else the one of the supplier that the thing names; without an offer the thing's own
- * price and pack, and whole sides where that is how a leather is bought.
+ * The offer that is preferred, or else the one of the supplier that the thing names, or the first where it names none;
+ * without an offer the thing's own price and pack, and whole sides where that is how a leather is bought.
  */
 export function itemTerms(
   row: BoughtRow,
@@ -28,7 +28,8 @@ export function itemTerms(
 ): ItemTerms {
   const offer =
     offers.find(({ preferred }) => preferred) ??
-    offers.find(({ supplierId }) => supplierId === row.supplier_id);
+    offers.find(({ supplierId }) => supplierId === row.supplier_id) ??
+    (row.supplier_id === null ? offers[0] : undefined);
   const supplier = suppliers.get(offer?.supplierId ?? row.supplier_id ?? 0) ?? null;
   const leadDays = offer?.usualLeadDays ?? supplier?.leadDays ?? 0;
   return { supplier, leadDays, terms: offer === undefined ? ownTerms(row) : offered(row, offer) };

@@ -60,6 +60,7 @@ export async function changeOffer(
   requireSound(offer);
   await work.em.flush();
   if (preferred === true) await preferOffer(work, offer);
+  if (preferred === false) await preferAnother(work, offer);
   await logOffer(work, offer, 'changed the offer for', { changed: Object.keys(typed) });
 }
 
@@ -73,6 +74,32 @@ export async function preferOffer({ em }: Work, offer: SupplierOffer): Promise<v
   offer.preferred = true;
   await em.flush();
 }
+
+/** Takes an offer off the list; where it was the preferred one, another takes its place. */
+export async function removeOffer(work: Work, offer: SupplierOffer): Promise<void> {
+  await logOffer(work, offer, 'took off the list the offer for');
+  await work.em.remove(offer).flush();
+  await preferAnother(work, offer);
+}
+
+/** Where none for the same thing is preferred, the least dear of the others is: somebody sells it still. */
+async function preferAnother(work: Work, { id, ...offer }: SupplierOffer): Promise<void> {
+  const { leatherId, hardwareId } = offer;
+  const all = await work.em.find(
+    SupplierOffer,
+    { leatherId, hardwareId },
+    { orderBy: { id: 'asc' } },
+  );
+  if (all.some(({ preferred }) => preferred)) return;
+  const [next] = all
+    .filter((each) => each.id !== id)
+    .toSorted((one, other) => firstPrice(one).cmp(firstPrice(other)));
+  if (next === undefined) return;
+  await preferOffer(work, next);
+  await logOffer(work, next, 'prefers from now on the offer for');
+}
+
+const firstPrice = ({ breaks }: SupplierOffer) => new Decimal(breaks[0]?.price ?? 0);
 
 /** The prices of an offer as they are kept. @throws {InvalidInput} naming the line that is wrong */
 function requireSound({ leatherId, minimum, multiple, breaks }: SupplierOffer): void {

@@ -12,7 +12,7 @@ import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
 import { adoptOffer } from './adopt-supplier-offer.ts';
 import { readOneOffer, readSupplierOffers } from './read-supplier-offers.ts';
-import { addOffer, changeOffer, findOffer, logOffer, thingOf } from './save-supplier-offer.ts';
+import { addOffer, changeOffer, findOffer, removeOffer, thingOf } from './save-supplier-offer.ts';
 
 export function supplierOfferRoutes(context: Context): Router {
   const router = Router();
@@ -38,8 +38,7 @@ export function supplierOfferRoutes(context: Context): Router {
 
   serve(router, context, removeSupplierOffer, async (work, { params }) => {
     const offer = await findOffer(work, params.id);
-    await logOffer(work, offer, 'took off the list the offer for');
-    await work.em.remove(offer).flush();
+    await removeOffer(work, offer);
     return { removed: true as const };
   });
 

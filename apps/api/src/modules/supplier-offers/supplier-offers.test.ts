@@ -182,3 +182,59 @@ describe('a list of offers', () => {
     expect(rest.next).toBeNull();
   });
 });
+
+describe('the preferred offer', () => {
+  const price = (each: string) => [{ from: '0', price: each }];
+  const preferredOf = async (leatherId: number) => {
+    const { body } = await owner().get(`/api/supplier-offers?leatherId=${leatherId}`).expect(200);
+    const items = body.items as { id: number; preferred: boolean }[];
+    return items.filter(({ preferred }) => preferred).map(({ id }) => id);
+  };
+
+  it('is the least dear of the others once it is removed, or preferred no more', async () => {
+    const { supplierId, leatherId } = await stockUp(shop);
+    const third = await owner().post('/api/suppliers').send({ name: 'Thornwick Hides' });
+    const first = await offer({ leatherId, supplierId, breaks: price('8') }).expect(201);
+    const dear = await offer({ leatherId, supplierId: second, breaks: price('9') }).expect(201);
+    const cheap = { leatherId, supplierId: third.body.id, breaks: price('8.5') };
+    const { body: least } = await offer(cheap).expect(201);
+    await owner().delete(`/api/supplier-offers/${first.body.id}`).expect(200);
+    expect(await preferredOf(leatherId)).toEqual([least.id]);
+    const { body } = await owner().get(`/api/supplier-offers?leatherId=${leatherId}`);
+    await owner()
+      .patch(`/api/supplier-offers/${least.id}`)
+      .set('If-Match', `"${body.items[0].version}"`)
+      .send({ preferred: false })
+      .expect(200);
+    expect(await preferredOf(leatherId)).toEqual([dear.body.id]);
+  });
+
+  it('still sells the thing where none is preferred and the thing names nobody', async () => {
+    const { supplierId, hardwareId } = await stockUp(shop);
+    const only = await offer({ hardwareId, supplierId, breaks: price('0.17') }).expect(201);
+    await owner()
+      .patch(`/api/supplier-offers/${only.body.id}`)
+      .set('If-Match', `"${only.body.version}"`)
+      .send({ preferred: false })
+      .expect(200);
+    const { body } = await owner().get('/api/order-suggestions?show=all').expect(200);
+    const items = body.items as { of: string; id: number; supplierId: number | null }[];
+    expect(items.find(({ of, id }) => of === 'hardware' && id === hardwareId)).toMatchObject({
+      supplierId,
+    });
+  });
+
+  it('refuses a quantity that nobody orders, with how much is the most', async () => {
+    const { supplierId, leatherId } = await stockUp(shop);
+    const refused = await offer({
+      ...{ leatherId, supplierId },
+      breaks: [...price('8'), { from: '1021933440', price: '6' }],
+    }).expect(422);
+    expect(refused.body.errors).toEqual([
+      {
+        field: 'breaks.1.from',
+        message: 'Enter at most 1,000,000,000 pieces, or 10,763 ft² of leather.',
+      },
+    ]);
+  });
+});
