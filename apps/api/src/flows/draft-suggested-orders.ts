@@ -1,5 +1,4 @@
 import type { BodyOf, draftSuggested, GoodsLineTyped } from '@hidewright/contract';
-import { Exact } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
 import { priceText } from '../http/decimal-text.ts';
@@ -10,8 +9,9 @@ import {
 } from '../modules/purchase-orders/draft-purchase-order.ts';
 import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts';
 import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
+import type { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
-import { boughtLine } from './order-suggestions/bought-line.ts';
+import { mergedLine } from './order-suggestions/merged-line.ts';
 import { suggestOrders, type Suggested } from './order-suggestions/suggest-orders.ts';
 
 type AskedLine = BodyOf<typeof draftSuggested>['lines'][number];
@@ -37,14 +37,16 @@ export async function draftSuggestedOrders(
   work: Work,
   lines: readonly AskedLine[],
 ): Promise<Drafted> {
-  const { items } = await suggestOrders(work);
+  const { items, workshop } = await suggestOrders(work);
   const wanted = lines.map((asked, at) => ({ item: itemFor(items, asked, at), asked }));
   const notes = wanted.flatMap(noteOn);
   const able = wanted.filter((each) => noteOn(each).length === 0);
   const orderIds: number[] = [];
   for (const supplierId of new Set(able.map(({ item }) => item.sold.supplier?.id ?? 0))) {
     const own = able.filter(({ item }) => item.sold.supplier?.id === supplierId);
-    orderIds.push(await putOnDraft(work, supplierId, own));
+    const put = await putOnDraft(work, supplierId, { wanted: own, workshop });
+    orderIds.push(put.orderId);
+    notes.push(...put.notes);
   }
   return { orderIds, notes };
 }
@@ -78,23 +80,24 @@ function noteOn({ item, asked }: Wanted): string[] {
 async function putOnDraft(
   work: Work,
   supplierId: number,
-  wanted: readonly Wanted[],
-): Promise<number> {
+  { wanted, workshop }: { wanted: readonly Wanted[]; workshop: Workshop },
+): Promise<{ orderId: number; notes: string[] }> {
   const draft = await newestDraft(work, supplierId);
   const there = draft === null ? [] : await linesOf(work, draft);
-  const lines = wanted.reduce(withWanted, there);
-  if (draft !== null && lines.length <= mostLines) {
-    await changeDraft(work, draft, { lines });
-    return draft.id;
+  const merged = withWanted(there, wanted, workshop);
+  if (draft !== null && merged.lines.length <= mostLines) {
+    await changeDraft(work, draft, { lines: merged.lines });
+    return { orderId: draft.id, notes: merged.notes };
   }
+  const { lines, notes } = withWanted([], wanted, workshop);
   const made = await draftPurchaseOrder(work, {
     supplierId,
     // Worked out when it is sent, from whatever is on it by then.
     expectedOn: null,
     note: '',
-    lines: wanted.reduce(withWanted, []),
+    lines,
   });
-  return made.id;
+  return { orderId: made.id, notes };
 }
 
 /** A draft that sends leather out to be worked on is left alone: it waits for its lot. */
@@ -125,16 +128,24 @@ async function linesOf({ em }: Work, draft: PurchaseOrder): Promise<GoodsLineTyp
   );
 }
 
-/** More of what is on the draft already goes to its line, at the price of both together. */
-function withWanted(lines: readonly GoodsLineTyped[], { item, asked }: Wanted): GoodsLineTyped[] {
-  const at = lines.findIndex((line) =>
-    line.of === 'leather'
-      ? asked.of === 'leather' && line.leatherId === asked.id
-      : asked.of === 'hardware' && line.hardwareId === asked.id,
-  );
-  const there = lines[at];
-  if (there === undefined) return [...lines, boughtLine(item.row, item.sold.terms, asked.quantity)];
-  const before = there.of === 'leather' ? there.areaMm2 : there.quantity;
-  const both = new Exact(before).plus(asked.quantity).toFixed();
-  return lines.with(at, boughtLine(item.row, item.sold.terms, both));
+/** More of what is on the draft already goes to its line. */
+function withWanted(
+  lines: readonly GoodsLineTyped[],
+  wanted: readonly Wanted[],
+  workshop: Workshop,
+): { lines: GoodsLineTyped[]; notes: string[] } {
+  const all = [...lines];
+  const notes: string[] = [];
+  for (const { item, asked } of wanted) {
+    const at = all.findIndex((line) => isOf(line, asked));
+    const merged = mergedLine(item, { there: all[at], more: asked.quantity }, workshop);
+    all.splice(at === -1 ? all.length : at, at === -1 ? 0 : 1, merged.line);
+    notes.push(...merged.notes);
+  }
+  return { lines: all, notes };
 }
+
+const isOf = (line: GoodsLineTyped, asked: AskedLine): boolean =>
+  line.of === 'leather'
+    ? asked.of === 'leather' && line.leatherId === asked.id
+    : asked.of === 'hardware' && line.hardwareId === asked.id;

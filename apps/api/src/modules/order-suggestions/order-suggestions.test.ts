@@ -234,6 +234,30 @@ describe('drafting', () => {
     ]);
   });
 
+  it('keeps a price that was typed on the draft, and says so', async () => {
+    await sold();
+    const { supplierId, hardwareId } = things;
+    const line = { of: 'hardware', hardwareId, quantity: 500, unitPrice: '0.15' };
+    const body = { supplierId, lines: [line] };
+    await owner().post('/api/purchase-orders').send(body).expect(201);
+    const { body: more } = await draft([lineFor(await rivets(), { quantity: '200' })]).expect(201);
+    expect(more.orders[0].lines).toMatchObject([{ quantity: 700, unitPrice: '0.15' }]);
+    expect(more.notes[0]).toMatch(/ keeps the price that was typed on its draft\.$/);
+  });
+
+  it('drafts hardware in what is sold, and says where an area is not', async () => {
+    await sold();
+    const few = await draft([lineFor(await rivets(), { quantity: '7' })]).expect(201);
+    expect(few.body.orders[0].lines).toMatchObject([{ quantity: 100 }]);
+    expect(few.body.notes[0]).toMatch(/: 100 are drafted, as less is not sold\.$/);
+    await change('leathers', things.leatherId, { wholeForm: 'side', wholeAreaMm2: ft2(22) });
+    const part = await draft([lineFor(await leather(), { quantity: ft2(30) })]).expect(201);
+    expect(part.body.orders[0].lines[1]).toMatchObject({ areaMm2: ft2(30) });
+    expect(part.body.notes[0]).toContain(
+      '30 ft² is drafted, as typed, but it is sold 22 ft² at a time.',
+    );
+  });
+
   it('pays the price that the quantity reaches', async () => {
     const breaks = [
       { from: '100', price: '0.17' },
