@@ -6,6 +6,8 @@ export interface StockStand {
   lastDeed: number;
   lastMovement: number;
   held: number;
+  /** How much of each thing is held for jobs. */
+  heldOf: Map<string, number>;
 }
 
 const stateful = [
@@ -23,16 +25,53 @@ export async function readStand(em: EntityManager): Promise<StockStand> {
     );
     for (const { id, state } of rows) states.set(`${kind} ${id}`, state);
   }
-  const [row] = await em.execute<[Omit<StockStand, 'states'>]>(
+  const [row] = await em.execute<[Omit<StockStand, 'states' | 'heldOf'>]>(
     `SELECT (SELECT COALESCE(MAX(seq), 0) FROM activity) AS lastDeed,
        (SELECT COALESCE(MAX(id), 0) FROM stock_movement) AS lastMovement,
        (SELECT COALESCE(SUM(reserved), 0) FROM stock_balance) AS held`,
   );
-  return { states, ...row };
+  const balances = await em.execute<BalanceRow[]>(readBalances);
+  return {
+    ...row,
+    states,
+    heldOf: new Map(balances.map(({ item, reserved }) => [item, reserved])),
+  };
 }
 
-/** What does not hold in the stockroom's tables, each as a sentence: [I1], [I2] and [I9]. */
-export async function faultsOf(em: EntityManager, broken: ReadonlySet<string>): Promise<string[]> {
+interface BalanceRow {
+  item: string;
+  reserved: number;
+  on_hand: number;
+}
+
+const readBalances = `SELECT COALESCE('lot ' || lot_id, 'hardware ' || hardware_id) AS item, reserved, on_hand FROM stock_balance`;
+
+/**
+ * Of what more is held than there is: a count must have said so, and nothing more of it may be held while it is so.
+ * What is enough again is taken out of `broken`, so that the next shortage needs a count of its own. [I2]
+ */
+export async function shortFaults(
+  em: EntityManager,
+  broken: Set<string>,
+  before: StockStand,
+): Promise<string[]> {
+  const faults: string[] = [];
+  for (const { item, reserved, on_hand } of await em.execute<BalanceRow[]>(readBalances)) {
+    if (on_hand < 0) faults.push(`I2: less than nothing of ${item} is there`);
+    if (reserved <= on_hand) {
+      broken.delete(item);
+      continue;
+    }
+    if (!broken.has(item))
+      faults.push(`I2: more of ${item} is held than there is, and no count said so`);
+    if (reserved > (before.heldOf.get(item) ?? 0))
+      faults.push(`I2: still more of ${item} is held, although there is too little`);
+  }
+  return faults;
+}
+
+/** What does not hold in the stockroom's tables, each as a sentence: [I1] and [I9]. */
+export async function faultsOf(em: EntityManager): Promise<string[]> {
   const faults: string[] = [];
   const unequal = await em.execute<{ fault: string }[]>(
     `SELECT 'I1: item ' || COALESCE(b.lot_id, b.hardware_id) || ' has ' || b.on_hand || ', moved ' || COALESCE(m.moved, 0) AS fault
@@ -58,14 +97,6 @@ export async function faultsOf(em: EntityManager, broken: ReadonlySet<string>): 
      GROUP BY r.id HAVING COALESCE(SUM(m.quantity), 0) <> r.open`,
   );
   faults.push(...held.map(({ fault }) => fault));
-  const short = await em.execute<{ lot: number | null; hardware: number | null }[]>(
-    `SELECT lot_id AS lot, hardware_id AS hardware FROM stock_balance WHERE reserved > on_hand OR on_hand < 0`,
-  );
-  for (const { lot, hardware } of short) {
-    const item = lot === null ? `hardware ${hardware}` : `lot ${lot}`;
-    if (!broken.has(item))
-      faults.push(`I2: more of ${item} is held than there is, and no count said so`);
-  }
   const astray = await em.execute<unknown[]>('PRAGMA foreign_key_check');
   if (astray.length > 0) faults.push(`I9: ${JSON.stringify(astray)}`);
   const [sound] = await em.execute<[{ integrity_check: string }]>('PRAGMA integrity_check');
