@@ -9,8 +9,10 @@ import { adjustStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
 import { requireOnHand } from './moved-since.ts';
 
-/** Sets the books to what was measured or counted on the rack, and says which jobs that leaves short. Nothing is set over
- * what moved since the books were looked at. */
+/**
+ * Sets the books to what was measured or counted on the rack, and says which jobs that leaves short.
+ * @throws {Problem} 404, 409 naming what moved since the books were looked at, 422
+ */
 export async function adjustToCount(
   work: Work,
   asked: BodyOf<typeof endpoint>,
