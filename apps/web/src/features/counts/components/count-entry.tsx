@@ -102,7 +102,6 @@ export function CountEntry({ line, waits, onRead, onDone, onNext }: CountEntryPr
           </Button>
         )}
       </div>
-      {!ofLot && <WeighCount of={line.tag} onCount={(count) => take({ quantity: count })} />}
       <p
         id={`${id}-wrong`}
         role="alert"
@@ -110,6 +109,7 @@ export function CountEntry({ line, waits, onRead, onDone, onNext }: CountEntryPr
       >
         {shown}
       </p>
+      {!ofLot && <WeighCount of={line.tag} onCount={(count) => take({ quantity: count })} />}
     </li>
   );
 }
