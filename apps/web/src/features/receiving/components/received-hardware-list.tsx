@@ -1,12 +1,13 @@
 import type { PurchaseLine } from '@hidewright/contract';
 import { countedWords, unitWord } from '@hidewright/domain';
 import { Plus } from 'lucide-react';
-import { useFieldArray } from 'react-hook-form';
+import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
+import { WeighCount } from '../../../components/weigh-count.tsx';
 import { blankHardware, isOpen, type TypedHardware } from '../typed-delivery.ts';
 
 interface ReceivedHardwareListProps {
@@ -26,7 +27,6 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
       isOpen(line) &&
       !fields.some((row) => row.purchaseLineId === line.id),
   );
-  if (lines.length > 0 && left.length + fields.length === 0) return null;
   return (
     <fieldset>
       <legend className="mb-3 text-lg font-semibold">Hardware and supplies</legend>
@@ -54,18 +54,18 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
             <Plus size={18} aria-hidden="true" /> {line.name}
           </Button>
         ))}
-        {lines.length === 0 && (
-          <Button
-            className="min-h-11"
-            onClick={() =>
-              append(blankHardware(undefined, null), {
-                focusName: `hardware.${fields.length}.hardwareId`,
-              })
-            }
-          >
-            <Plus size={18} aria-hidden="true" /> Hardware or supplies
-          </Button>
-        )}
+        <Button
+          className="min-h-11"
+          tone={lines.length === 0 ? 'secondary' : 'quiet'}
+          onClick={() =>
+            append(blankHardware(undefined, null), {
+              focusName: `hardware.${fields.length}.hardwareId`,
+            })
+          }
+        >
+          <Plus size={18} aria-hidden="true" />
+          {lines.length === 0 ? 'Hardware or supplies' : 'Other hardware or supplies came with it'}
+        </Button>
       </div>
     </fieldset>
   );
@@ -83,6 +83,7 @@ interface ReceivedHardwareProps {
 
 function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHardwareProps) {
   const row = `hardware.${at}`;
+  const { setValue } = useFormContext();
   return (
     <div
       role="group"
@@ -121,6 +122,14 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
           label="Came"
           unit={line?.unit && unitWord(line.unit, 2)}
         />
+        {(!line || line.unit === 'piece') && (
+          <WeighCount
+            of={line?.name ?? `Hardware ${at + 1}`}
+            onCount={(count) =>
+              setValue(`${row}.quantity`, count, { shouldDirty: true, shouldValidate: true })
+            }
+          />
+        )}
         <TextField name={`${row}.batch`} label="Batch" optional help="As printed on the bag." />
         {mayPrice && (
           <MoneyField

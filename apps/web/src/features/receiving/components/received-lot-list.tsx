@@ -15,7 +15,7 @@ interface ReceivedLotListProps {
   mayPrice: boolean;
 }
 
-/** The lots that came, each a card; of an order, one press adds another lot of the same leather. */
+/** The lots that came, each a card; of an order, one press adds another lot of the same leather, or of one not ordered. */
 export function ReceivedLotList(props: ReceivedLotListProps) {
   const { lines, leathers, tolerancePercent, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
@@ -36,7 +36,6 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
       ? ''
       : `${rackAreaText(areaMm2, workshop)} ${service === null ? 'to come' : 'went out'}`;
 
-  if (lines.length > 0 && open.length + fields.length === 0) return null;
   return (
     <fieldset>
       <legend className="mb-3 text-lg font-semibold">Leather</legend>
@@ -67,16 +66,16 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
               : `Another lot from ${line.service.lotTag}`}
           </Button>
         ))}
-        {lines.length === 0 && (
-          <Button
-            className="min-h-11"
-            onClick={() =>
-              append(blankLot(undefined, null), { focusName: `lots.${fields.length}.leatherId` })
-            }
-          >
-            <Plus size={18} aria-hidden="true" /> A lot of leather
-          </Button>
-        )}
+        <Button
+          className="min-h-11"
+          tone={lines.length === 0 ? 'secondary' : 'quiet'}
+          onClick={() =>
+            append(blankLot(undefined, null), { focusName: `lots.${fields.length}.leatherId` })
+          }
+        >
+          <Plus size={18} aria-hidden="true" />
+          {lines.length === 0 ? 'A lot of leather' : 'Other leather came with it'}
+        </Button>
       </div>
     </fieldset>
   );
