@@ -129,3 +129,20 @@ it('learns from how long the supplier’s deliveries took', async () => {
   at('2026-12-01');
   expect(await draft()).toMatchObject({ arrivesOn: '2026-12-04' });
 });
+
+it('counts the shop’s own days, whatever day it is at Greenwich', async () => {
+  const { body: workshop } = await owner().get('/api/workshop').expect(200);
+  const zone = owner().patch('/api/workshop').set('If-Match', `"${workshop.version}"`);
+  await zone.send({ timeZone: 'America/Los_Angeles' }).expect(200);
+  for (const day of ['17', '18', '19']) {
+    // Half past five in the evening there, of the day before.
+    shop.clock.set(new Date(`2026-11-${day}T01:30:00Z`));
+    const { id, lines } = await draft();
+    await send(id);
+    const rivet = { hardwareId: things.hardwareId, quantity: 100, purchaseLineId: lines[0]?.id };
+    const body = { purchaseOrderId: id, hardware: [rivet] };
+    await owner().post('/api/receipts').send(body).expect(201);
+  }
+  shop.clock.set(new Date('2026-12-01T18:00:00Z'));
+  expect(await draft()).toMatchObject({ arrivesOn: '2026-12-01' });
+});
