@@ -82,6 +82,12 @@ describe('what to order', () => {
     expect(fine).toBeGreaterThan(0);
   });
 
+  it('says several of what is counted otherwise than by the piece', async () => {
+    await sold();
+    await change('hardware', things.hardwareId, { unit: 'pair' });
+    expect((await rivets()).why).toContain('below the minimum of 500 pairs.');
+  });
+
   it('asks for leather below its least area, in whole sides', async () => {
     const whole = { wholeForm: 'side', wholeAreaMm2: ft2(22) };
     await change('leathers', things.leatherId, { reorderAtMm2: ft2(50), ...whole });

@@ -1,4 +1,5 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
+import { unitWord, wholes, type HardwareUnit } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { areaText, countText, numberText } from '../../lib/formatting.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
@@ -6,12 +7,13 @@ import type { Workshop } from '../../lib/workshop.tsx';
 type Item = OrderSuggestionReply;
 type Unit = Pick<Item, 'of' | 'unit'>;
 
-/** A quantity as people say it: 1,250, 40 m, or 24.8 ft². */
+/** A quantity as people say it: 1,250, 12 pairs, 40 m, or 24.8 ft². */
 export function amountText(value: string, { of, unit }: Unit, { areaUnit }: Workshop): string {
   if (of === 'leather') return areaText(value, areaUnit, 1);
   const rounded = new Decimal(value).toDecimalPlaces(Math.abs(Number(value)) < 10 ? 1 : 0);
   const figure = rounded.isInteger() ? countText(rounded.toNumber()) : rounded.toFixed();
-  return unit === 'piece' ? figure : `${figure} ${unit}`;
+  const word = unitWord(unit as HardwareUnit, rounded.toNumber());
+  return unit === 'piece' ? figure : `${figure} ${word}`;
 }
 
 /** As it is sold: whole sides of about 22 ft², or packs of 100, at least 500. */
@@ -20,7 +22,7 @@ export function soldWords(item: Item, workshop: Workshop): string {
   const say = (value: string) => amountText(value, item, workshop);
   const packs =
     whole !== null && multiple === whole.areaMm2
-      ? `whole ${whole.form}s of about ${say(whole.areaMm2)}`
+      ? `whole ${wholes({ count: 2, form: whole.form })} of about ${say(whole.areaMm2)}`
       : multiple !== null && Number(multiple) > 1 && of === 'hardware'
         ? `packs of ${say(multiple)}`
         : '';
@@ -32,7 +34,7 @@ export function soldWords(item: Item, workshop: Workshop): string {
 export function wholeWords(quantity: string, { whole }: Pick<Item, 'whole'>): string {
   if (whole === null) return '';
   const count = new Decimal(quantity).div(whole.areaMm2).toDecimalPlaces(1).toNumber();
-  return `${count} ${whole.form}${count === 1 ? '' : 's'}`;
+  return `${count} ${wholes({ count, form: whole.form })}`;
 }
 
 export const periodWord = ({ usage }: Pick<Item, 'usage'>): string =>
