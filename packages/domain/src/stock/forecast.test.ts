@@ -50,7 +50,6 @@ describe('crostonForecast', () => {
   });
 
   it.each([
-    ['series', [0, 0], 0.1],
     ['series', [], 0.1],
     ['series.1', [1, -1], 0.1],
     ['alpha', [1], 0],
@@ -58,4 +57,8 @@ describe('crostonForecast', () => {
   ])('refuses %s where it makes no sense', (field, uses, alpha) => {
     expect(() => crostonForecast(uses, alpha)).toThrow(expect.objectContaining({ field }));
   });
+});
+
+it('expects nothing of what was never used', () => {
+  expect(crostonForecast([0, 0, 0], 0.1)).toEqual({ size: 0, interval: 3, forecast: 0 });
 });

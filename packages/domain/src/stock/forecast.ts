@@ -26,7 +26,9 @@ export interface CrostonForecast {
  * Use per period of what is rarely used (Croston, Operational Research Quarterly 23, 1972; from
  * memory): sizes and intervals are smoothed by themselves. Begins with the first use and with the
  * periods up to it, counted from the start of the series.
- * @param series use per period, oldest first; 0 or more, and not all 0
+ * Where nothing was ever used, nothing is expected, and the interval is as long as the series (a
+ * forecast of 0 as R's forecast::croston gives it, from memory).
+ * @param series use per period, oldest first; 0 or more
  * @param alpha above 0, up to 1
  * @throws InvalidInput
  */
@@ -37,7 +39,7 @@ export function crostonForecast(series: readonly number[], alpha: number): Crost
   const intervals = used.map(({ period }, at) => period - (used[at - 1]?.period ?? 0));
   const [firstSize, firstInterval] = [sizes[0], intervals[0]];
   if (firstSize === undefined || firstInterval === undefined) {
-    throw new InvalidInput('series', 'Give a series with at least one use above 0.');
+    return { size: 0, interval: series.length, forecast: 0 };
   }
   const size = smooth(sizes, alpha, firstSize);
   const interval = smooth(intervals, alpha, firstInterval);

@@ -44,8 +44,14 @@ describe('reorderPoint', () => {
     expect(() => reorderPoint({ ...asked, ...change })).toThrow(expect.objectContaining({ field }));
   });
 
-  it('takes a z below zero for a slip', () => {
-    const asked = { demandMean: 1, demandSd: 1, leadMean: 1, leadSd: 1 };
-    expect(() => reorderPoint({ ...asked, z: -1.65 })).toThrow('Write z');
+  it('takes a z below zero as the service below one half that it is', () => {
+    const asked = { demandMean: 10, demandSd: 3, leadMean: 4, leadSd: 0 };
+    // 10 × 4 - 1.65 × 3 × 2, by hand
+    expect(reorderPoint({ ...asked, z: -1.65 }).point).toBeCloseTo(30.1, 9);
+    const byService = reorderPoint({ ...asked, service: 0.3 });
+    expect(reorderPoint({ ...asked, z: -0.5244005127080407 }).safety).toBeCloseTo(
+      byService.safety,
+      6,
+    );
   });
 });

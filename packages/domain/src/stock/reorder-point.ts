@@ -23,7 +23,7 @@ export interface ReorderPoint {
  * When to order: mean demand until the delivery plus safety stock,
  * z √(leadMean × demandSd² + demandMean² × leadSd²), demand of the periods taken as independent and
  * normal (textbook formula, such as Heizer and Render's, from memory). A service below one half
- * gives a safety stock below 0; a z below 0 is refused as a slip.
+ * gives a safety stock below 0, and so does a z below 0, which is the same.
  * @throws InvalidInput
  */
 export function reorderPoint(input: DemandOverLead & Service): ReorderPoint {
@@ -31,8 +31,7 @@ export function reorderPoint(input: DemandOverLead & Service): ReorderPoint {
   const demandSd = readNumber(input.demandSd, 'demandSd', { min: 0 });
   const lead = readNumber(input.leadMean, 'leadMean', { min: 0 });
   const leadSd = readNumber(input.leadSd, 'leadSd', { min: 0 });
-  const z =
-    'z' in input ? readNumber(input.z, 'z', { min: 0 }) : normalQuantile(input.service, 'service');
+  const z = 'z' in input ? readNumber(input.z, 'z') : normalQuantile(input.service, 'service');
   const safety = z * Math.hypot(Math.sqrt(lead) * demandSd, demand * leadSd);
   return { safety, point: demand * lead + safety };
 }
