@@ -104,6 +104,11 @@ walk(
     await tag.press('Enter');
     await maker.getByLabel(/^Came/).first().fill('200');
     await maker.getByLabel(/^Batch/).fill('SN-88');
+    // In the same parcel, and on no order.
+    await maker.getByRole('button', { name: 'Other hardware came with it' }).click();
+    const other = maker.getByRole('group', { name: 'Hardware 2', exact: true });
+    await other.getByLabel('Hardware or supplies').selectOption({ index: 2 });
+    await other.getByLabel(/^Came/).fill('50');
     await expectAccessible(maker);
     await expectNoOverflow(maker);
     await maker.reload();

@@ -64,7 +64,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
           }
         >
           <Plus size={18} aria-hidden="true" />
-          {lines.length === 0 ? 'Hardware or supplies' : 'Other hardware or supplies came with it'}
+          {lines.length === 0 ? 'Hardware or supplies' : 'Other hardware came with it'}
         </Button>
       </div>
     </fieldset>
