@@ -305,7 +305,8 @@ describe('drafting what is short', () => {
     const rivets = first.orders.find(({ supplierName }) => supplierName === 'Fennbridge Fittings');
     expect(rivets).toMatchObject({
       state: 'draft',
-      expectedOn: '2026-12-04',
+      expectedOn: null,
+      arrivesOn: '2026-12-04',
       note: 'For Round coaster, packed by Mon 21 Dec 2026.',
       lines: [{ quantity: 300 }],
     });
