@@ -48,6 +48,28 @@ describe('verifying a data folder', () => {
 
   it.each([
     [
+      'stock held for a cancelled order',
+      `UPDATE reservation SET open = 1 WHERE id = (SELECT MAX(r.id) FROM reservation r
+        JOIN job j ON j.id = r.job_id JOIN customer_order o ON o.id = j.order_id WHERE o.state = 'cancelled')`,
+      'A cancelled order holds no stock',
+    ],
+    [
+      'an invoice for a cancelled order',
+      `UPDATE invoice SET order_id = (SELECT id FROM customer_order WHERE state = 'cancelled')
+        WHERE id = (SELECT MAX(id) FROM invoice)`,
+      'A cancelled order has no open invoice',
+    ],
+    [
+      'a reason that an order was cancelled for',
+      'DELETE FROM order_cancellation',
+      'An order is cancelled exactly where it is written why',
+    ],
+    [
+      'a promised day that was moved',
+      `UPDATE promise_move SET to_day = '2027-01-31'`,
+      'Each move of a promised day begins where the one before ended, and the last ends on the day promised now',
+    ],
+    [
       'a part that is a kit',
       'INSERT INTO kit_part (kit_id, hardware_id, quantity) SELECT hardware_id, 1, 1 FROM kit_part LIMIT 1',
       'No part of a kit is a kit',

@@ -77,6 +77,7 @@ describe('the demo’s year', () => {
     expect(await states('customer_order')).toEqual(
       expect.arrayContaining([
         'awaiting proof',
+        'cancelled',
         'taken on',
         'in work',
         'packed',

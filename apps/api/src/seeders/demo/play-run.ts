@@ -13,6 +13,7 @@ import { Order } from '../../modules/orders/order.entity.ts';
 import { Tool } from '../../modules/tools/tool.entity.ts';
 import type { DemoShop } from './demo-shop.ts';
 import { planBooks } from './play-books.ts';
+import { planChanges } from './play-changes.ts';
 import { planWork } from './play-work.ts';
 import { patterns } from './scenario/patterns.ts';
 import type { DemoRun } from './scenario/runs.ts';
@@ -106,6 +107,7 @@ function planTakingOn(stage: Stage, played: Played): void {
   const { shop, year } = stage;
   const { run } = played;
   year.planAfter(run.daysBefore, 3, '08:50', () => takeOn(stage, played));
+  planChanges(stage, played);
   if (run.fate === 'awaiting') return;
   year.planAfter(run.daysBefore, 4, '10:30', () => arrive(shop, played, 'proof'));
   year.planAfter(run.daysBefore, 7, '10:45', async () => {

@@ -38,6 +38,10 @@ export interface DemoRun {
   spoiled: number;
   /** What goes back of its leather, in mm. */
   offcut?: { widthMm: string; heightMm: string };
+  /** Its promised day was moved by so many working days, and why. */
+  moved?: { workdays: number; why: string };
+  /** It was cancelled after it was taken on, and why. */
+  calledOff?: string;
   /** Days from invoice to payment. */
   paidAfter?: number;
   method?: 'bank' | 'card' | 'cash' | 'cheque';
@@ -322,6 +326,19 @@ export const runs: DemoRun[] = [
     spoiled: 0.9,
   },
   {
+    daysBefore: 76,
+    customer: 'Quillfeather Books',
+    pattern: 'Zip-pull',
+    title: 'Reading club pulls',
+    quantities: [100, 200],
+    chosen: 100,
+    weeks: 4,
+    fate: 'awaiting',
+    calledOff: 'Their reading club is put off until spring',
+    slower: 1,
+    spoiled: 1,
+  },
+  {
     daysBefore: 62,
     customer: 'Quillfeather Books',
     pattern: 'Bookmark',
@@ -396,6 +413,7 @@ export const runs: DemoRun[] = [
     weeks: 5,
     fate: 'ready',
     by: 'phone',
+    moved: { workdays: 2, why: 'The brewery bottles two days later' },
     slower: 1,
     spoiled: 1,
   },
