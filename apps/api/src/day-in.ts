@@ -7,8 +7,19 @@ export function dayIn(timeZone: string, instant: Date): string {
   return calendarOf(timeZone).format(instant);
 }
 
-/** The first instant after a day in a time zone: at most 15 hours from midnight at Greenwich, wherever that is. */
-export function endOfDay(timeZone: string, day: string): Date {
+/** The end of a day in a time zone: its date, and the first instant after it. */
+export interface DayOver {
+  on: string;
+  over: string;
+}
+
+export const dayOver = (timeZone: string, on: string): DayOver => ({
+  on,
+  over: endOfDay(timeZone, on).toISOString(),
+});
+
+/** At most 15 hours from midnight at Greenwich, wherever that is. */
+function endOfDay(timeZone: string, day: string): Date {
   const midnight = Date.parse(`${addDays(day, 1)}T00:00:00Z`);
   let [before, after] = [midnight - mostHours, midnight + mostHours];
   while (after - before > 1) {

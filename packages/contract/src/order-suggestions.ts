@@ -1,3 +1,4 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
@@ -51,7 +52,7 @@ export const orderSuggestion = z
     name: z.string(),
     kind: z.enum(['leather', 'hardware', 'supplies']),
     /** What it is counted in: mm2 of leather, else what one of it is. */
-    unit: z.string(),
+    unit: z.enum(['mm2', ...hardwareUnits]),
     state: z.enum(['now', 'soon', 'drafted', 'fine']),
     /** In a sentence or two, without prices. */
     why: z.string(),

@@ -151,7 +151,7 @@ export { doneOn } from './promise/elapsed-days.ts';
 export { planDays } from './promise/plan-days.ts';
 export type { PlannedDay } from './promise/plan-days.ts';
 export * from './promise/bench-plan.ts';
-export { movePromise } from './promise/moved-promise.ts';
+export { movedPromise } from './promise/moved-promise.ts';
 export type { MovedPromise } from './promise/moved-promise.ts';
 export * from './promise/late-jobs.ts';
 export * from './promise/two-machine.ts';

@@ -57,6 +57,8 @@ async function requireInvoiceable(work: Work, order: Order): Promise<void> {
       existing.number === null ? 'has a draft invoice' : `was invoiced as ${existing.number}`;
     throw wrongState(`${order.number} ${which} already. Open that one.`, ['open its invoice']);
   }
+  if (order.state === 'cancelled')
+    throw wrongState(`${order.number} was cancelled, so there is nothing to invoice.`, []);
   if (!ready.includes(order.state)) {
     throw wrongState(
       `${order.number} is ${order.state}. It can be invoiced once it is packed.`,

@@ -1,5 +1,3 @@
-import { Decimal } from 'decimal.js';
-import { scaled } from '../db/columns/scaled-decimal.ts';
 import { wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { findJob, findWantedJob, requireJobState } from '../modules/jobs/find-job.ts';
@@ -8,20 +6,17 @@ import { describeItem } from '../modules/stock/described-item.ts';
 import type { StockItem } from '../modules/stock/stock-item.ts';
 import { releaseReservations, reserveStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
+import { ledgerAmount, type AskedAmount } from './asked-amount.ts';
 import { requireItsLeather } from './its-leather.ts';
-import type { Taking } from './take-for-job.ts';
 
 /**
  * Holds leather of a named lot, or hardware, for a job.
  * @throws {Problem} 404; 409 naming what is free when it is less, or when the job is finished; 422 for another leather
  */
-export async function holdForJob(work: Work, jobId: number, asked: Taking): Promise<Job> {
+export async function holdForJob(work: Work, jobId: number, asked: AskedAmount): Promise<Job> {
   const job = await findWantedJob(work.em, jobId);
   requireJobState(job, 'waiting', 'ready', 'at the bench', 'paused');
-  const [item, quantity]: [StockItem, number] =
-    'lotId' in asked
-      ? [{ lotId: asked.lotId }, scaled(new Decimal(asked.areaMm2), 3)]
-      : [{ hardwareId: asked.hardwareId }, asked.quantity];
+  const { quantity, ...item } = ledgerAmount(asked);
   if (typeof item.lotId === 'number') await requireItsLeather(work, job, item.lotId);
   await reserveStock(work, { jobId, ...item, quantity });
   await note(work, job, item, quantity, 'held');

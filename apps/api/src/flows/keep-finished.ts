@@ -23,7 +23,7 @@ export async function keepFinished(work: Work, job: Job, order: Order): Promise<
   if (seconds > 0) await keep(work, job, { ...kind, sort: 'seconds' }, [seconds, worth.seconds]);
 }
 
-/** The good pieces of a cancelled order go on the shelf too, at what is left of the cost beside those that lie there. */
+/** The good pieces of a cancelled order go on the shelf too, at what its overs and seconds have left of the cost. */
 export async function keepPacked(work: Work, job: Job, order: Order): Promise<void> {
   const quantity = Math.min(job.good, order.quantity);
   if (quantity === 0) return;

@@ -3,7 +3,7 @@ import { offcutAreaMm2 } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { scaled } from '../db/columns/scaled-decimal.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
-import { findJob, isCancelled, requireJobState } from '../modules/jobs/find-job.ts';
+import { findJob, requireBringsBack } from '../modules/jobs/find-job.ts';
 import { findLot } from '../modules/lots/find-lot.ts';
 import { drawTag } from '../modules/lots/lot-tags.ts';
 import { Lot } from '../modules/lots/lot.entity.ts';
@@ -21,8 +21,7 @@ type Asked = BodyOf<typeof endpoint>;
  */
 export async function putOffcutBack(work: Work, jobId: number, asked: Asked): Promise<Lot> {
   const job = await findJob(work.em, jobId);
-  if (job.state === 'finished' || !(await isCancelled(work.em, job)))
-    requireJobState(job, 'at the bench', 'paused');
+  await requireBringsBack(work.em, job);
   const from = await findLot(work.em, asked.lotId);
   const areaMm2 = new Decimal(offcutAreaMm2(asked));
   const cut = { jobId, fromLotId: from.id, quantity: scaled(areaMm2, 3) };

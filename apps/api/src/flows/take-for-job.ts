@@ -12,8 +12,6 @@ import type { Work } from '../work.ts';
 import { requireItsLeather } from './its-leather.ts';
 import { startIfReady } from './start-job.ts';
 
-export type Taking = { lotId: number; areaMm2: string } | { hardwareId: number; quantity: number };
-
 const inLedger = (areaMm2: string): number => scaled(new Decimal(areaMm2), 3);
 
 /**

@@ -1,22 +1,7 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import os from 'node:os';
-import path from 'node:path';
-import { MikroORM } from '@mikro-orm/sqlite';
-import { afterAll, beforeAll, expect, it } from 'vitest';
-import { ormConfig } from '../mikro-orm.config.ts';
+import { expect, it } from 'vitest';
+import { beforeMigrations } from '../testing/before-migrations.ts';
 
-let folder: string;
-let orm: MikroORM;
-beforeAll(async () => {
-  folder = await mkdtemp(path.join(os.tmpdir(), 'hidewright-before-'));
-  orm = await MikroORM.init(ormConfig(path.join(folder, 'before.sqlite')));
-});
-afterAll(async () => {
-  await orm.close();
-  await rm(folder, { recursive: true, force: true });
-});
-
-const run = <Row>(sql: string) => orm.em.getConnection().execute<Row[]>(sql);
+const { run, up } = beforeMigrations();
 
 const before = [
   `INSERT INTO supplier (name, email, phone, lead_days, note, active) VALUES ('Oldbeck', '', '', 7, '', 1)`,
@@ -36,9 +21,9 @@ const before = [
 ];
 
 it('what came on an order before becomes deliveries, one for each time something came', async () => {
-  await orm.getMigrator().up({ to: 'migration-20261202-the-photos' });
+  await up('migration-20261202-the-photos');
   for (const statement of before) await run(statement);
-  await orm.getMigrator().up();
+  await up();
   expect(
     await run('SELECT id, purchase_order_id, received_on, freight, actor_name FROM receipt'),
   ).toEqual([

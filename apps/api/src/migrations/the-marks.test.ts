@@ -1,22 +1,7 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import os from 'node:os';
-import path from 'node:path';
-import { MikroORM } from '@mikro-orm/sqlite';
-import { afterAll, beforeAll, expect, it } from 'vitest';
-import { ormConfig } from '../mikro-orm.config.ts';
+import { expect, it } from 'vitest';
+import { beforeMigrations } from '../testing/before-migrations.ts';
 
-let folder: string;
-let orm: MikroORM;
-beforeAll(async () => {
-  folder = await mkdtemp(path.join(os.tmpdir(), 'hidewright-before-'));
-  orm = await MikroORM.init(ormConfig(path.join(folder, 'before.sqlite')));
-});
-afterAll(async () => {
-  await orm.close();
-  await rm(folder, { recursive: true, force: true });
-});
-
-const run = <Row>(sql: string) => orm.em.getConnection().execute<Row[]>(sql);
+const { run, up } = beforeMigrations();
 
 /** One order whose side is marked as ordered, and one whose side measures more than is marked. */
 const before = [
@@ -41,9 +26,9 @@ const before = [
 ];
 
 it('leather that came before counts as it is marked, and its order is done or is not', async () => {
-  await orm.getMigrator().up({ to: 'migration-20261208-the-days' });
+  await up('migration-20261208-the-days');
   for (const statement of before) await run(statement);
-  await orm.getMigrator().up();
+  await up();
   expect(await run('SELECT received, awaited_until FROM purchase_line ORDER BY id')).toEqual([
     { received: 2550, awaited_until: '2026-11-09' },
     { received: 2500, awaited_until: null },

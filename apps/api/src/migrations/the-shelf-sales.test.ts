@@ -1,22 +1,7 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import os from 'node:os';
-import path from 'node:path';
-import { MikroORM } from '@mikro-orm/sqlite';
-import { afterAll, beforeAll, expect, it } from 'vitest';
-import { ormConfig } from '../mikro-orm.config.ts';
+import { expect, it } from 'vitest';
+import { beforeMigrations } from '../testing/before-migrations.ts';
 
-let folder: string;
-let orm: MikroORM;
-beforeAll(async () => {
-  folder = await mkdtemp(path.join(os.tmpdir(), 'hidewright-before-'));
-  orm = await MikroORM.init(ormConfig(path.join(folder, 'before.sqlite')));
-});
-afterAll(async () => {
-  await orm.close();
-  await rm(folder, { recursive: true, force: true });
-});
-
-const run = <Row>(sql: string) => orm.em.getConnection().execute<Row[]>(sql);
+const { run, up } = beforeMigrations();
 
 const before = [
   `INSERT INTO customer (id, name, contact_name, email, phone, address, note, active, created_at)
@@ -48,9 +33,9 @@ const before = [
 ];
 
 it('invoices and the shelf’s ledger from before come through, as locked as they were', async () => {
-  await orm.getMigrator().up({ to: 'migration-20261206-the-weights' });
+  await up('migration-20261206-the-weights');
   for (const row of before) await run(row);
-  await orm.getMigrator().up();
+  await up();
   expect(await run(`SELECT id, number, order_id, state FROM invoice ORDER BY id`)).toEqual([
     { id: 1, number: 'I-0001', order_id: 1, state: 'issued' },
     { id: 2, number: null, order_id: 1, state: 'draft' },

@@ -1,31 +1,16 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import os from 'node:os';
-import path from 'node:path';
-import { MikroORM } from '@mikro-orm/sqlite';
-import { afterAll, beforeAll, expect, it } from 'vitest';
-import { ormConfig } from '../mikro-orm.config.ts';
+import { expect, it } from 'vitest';
+import { beforeMigrations } from '../testing/before-migrations.ts';
 
-let folder: string;
-let orm: MikroORM;
-beforeAll(async () => {
-  folder = await mkdtemp(path.join(os.tmpdir(), 'hidewright-before-'));
-  orm = await MikroORM.init(ormConfig(path.join(folder, 'before.sqlite')));
-});
-afterAll(async () => {
-  await orm.close();
-  await rm(folder, { recursive: true, force: true });
-});
-
-const run = <Row>(sql: string) => orm.em.getConnection().execute<Row[]>(sql);
+const { run, up } = beforeMigrations();
 
 it('a rack and its ledger from before come through, and what points at a tool still does', async () => {
-  await orm.getMigrator().up({ to: 'migration-20261201-the-sides' });
+  await up('migration-20261201-the-sides');
   await run(`INSERT INTO tool (number, kind, name, metal, cost, life_uses, used, slot, state, border_mm)
     VALUES ('41', 'stamp plate', 'Heron', 'brass', 9000, 100000, 70, 'C1', 'on the rack', 1500000),
       ('42', 'stamp plate', 'Oars', 'copper', 8000, 100000, 0, '', 'scrapped', NULL)`);
   await run(`INSERT INTO impression (tool_id, uses, at, reason, actor_name)
     VALUES (1, 70, '2026-11-30T09:00:00.000Z', 'a trial', 'The owner')`);
-  await orm.getMigrator().up();
+  await up();
   expect(
     await run(
       `SELECT id, number, used, state, border_mm, owned_by, kept_until FROM tool ORDER BY id`,

@@ -1,8 +1,8 @@
 import type { Context } from '../context.ts';
 
 /**
- * A job of 100 pieces with nothing held or taken, its order without the quote it would come from, for tests of what jobs hold
- * and take; its id is `job`, its number J-9 and that.
+ * A job of 100 pieces with nothing held or taken, its order without the quote it would come from, for tests of what
+ * jobs hold and take; its id is `job`, its number J-9 and that.
  */
 export async function writeBareJob(context: Context, job: number): Promise<number> {
   const connection = context.orm.em.fork().getConnection();

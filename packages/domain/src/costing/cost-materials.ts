@@ -2,7 +2,7 @@ import type { Decimal } from 'decimal.js';
 import { type DecimalText, Exact, toAtMost, toPlaces, upToWhole } from '../numbers/decimal-text.ts';
 import { mm2ToFootage } from '../units/footage.ts';
 import type { CostLines } from './cost-lines.ts';
-import type { RunHardware, RunInput, RunSupply } from './run-input.ts';
+import { perWords, type RunHardware, type RunInput, type RunSupply } from './run-input.ts';
 
 /** Leather as it must be bought: whole sides, hides or panels. */
 export interface BoughtWhole {
@@ -55,8 +55,6 @@ function addLeather(lines: CostLines, input: RunInput, { containers, area }: Tak
     `${containers} ${noun} × ${one} ft²${more} at ${leather.pricePerFt2} per ft²`,
   );
 }
-
-const perWords = { piece: 'for each piece', hundred: 'for 100 pieces', run: 'for the run' };
 
 function hardwareWorkings(hardware: RunHardware, quantity: number, count: number): string {
   const { perPiece, per = 'piece', unitPrice } = hardware;

@@ -42,6 +42,13 @@ export interface RunLeather {
 export const hardwarePers = ['piece', 'hundred', 'run'] as const;
 export type HardwarePer = (typeof hardwarePers)[number];
 
+/** The same in words, to stand behind a count. */
+export const perWords: Record<HardwarePer, string> = {
+  piece: 'for each piece',
+  hundred: 'for 100 pieces',
+  run: 'for the run',
+};
+
 export interface RunHardware {
   /** the shop's own number of it, passed through */
   hardwareId?: number | undefined;

@@ -4,7 +4,7 @@ import { freeUntil, shortByPromise } from './bench-plan.ts';
 import type { Bench } from './bench-time.ts';
 import { addDays } from './day.ts';
 import type { HeldWork } from './held-work.ts';
-import { movePromise } from './moved-promise.ts';
+import { movedPromise } from './moved-promise.ts';
 
 /** Tuesday; 6 hours a day. */
 const bench: Bench = { today: '2026-12-01', perDay: 36_000, loggedToday: 0 };
@@ -14,20 +14,20 @@ const held = (jobId: number, promisedOn: string, remaining: number): HeldWork =>
   remaining,
 });
 
-describe('movePromise', () => {
+describe('movedPromise', () => {
   it('says what of the job is left over on the new day, and by when all of it can be done', () => {
     const work = [held(1, '2026-12-02', 50_000), held(2, '2026-12-09', 40_000)];
-    expect(movePromise(bench, work, { jobId: 2, to: '2026-12-02' })).toEqual({
+    expect(movedPromise(bench, work, { jobId: 2, to: '2026-12-02' })).toEqual({
       short: 18_000,
       earliest: '2026-12-03',
       pushed: [],
     });
-    expect(movePromise(bench, work, { jobId: 2, to: '2026-12-03' }).short).toBeNull();
+    expect(movedPromise(bench, work, { jobId: 2, to: '2026-12-03' }).short).toBeNull();
   });
 
   it('names another job that an earlier day makes late, and how much of it', () => {
     const work = [held(1, '2026-12-02', 50_000), held(2, '2026-12-09', 40_000)];
-    expect(movePromise(bench, work, { jobId: 2, to: '2026-12-01' })).toEqual({
+    expect(movedPromise(bench, work, { jobId: 2, to: '2026-12-01' })).toEqual({
       short: 4_000,
       earliest: '2026-12-03',
       pushed: [{ jobId: 1, short: 18_000 }],
@@ -36,7 +36,7 @@ describe('movePromise', () => {
 
   it('leaves out what was late before and is no later', () => {
     const work = [held(1, '2026-12-01', 50_000), held(2, '2026-12-09', 10_000)];
-    expect(movePromise(bench, work, { jobId: 2, to: '2026-12-08' }).pushed).toEqual([]);
+    expect(movedPromise(bench, work, { jobId: 2, to: '2026-12-08' }).pushed).toEqual([]);
   });
 
   it('keeps the waits of the job itself', () => {
@@ -45,14 +45,14 @@ describe('movePromise', () => {
       { minutes: 6_000, waitAfter: 0 },
     ];
     const work = [{ ...held(1, '2026-12-09', 12_000), parts }];
-    expect(movePromise(bench, work, { jobId: 1, to: '2026-12-01' })).toMatchObject({
+    expect(movedPromise(bench, work, { jobId: 1, to: '2026-12-01' })).toMatchObject({
       short: 6_000,
       earliest: '2026-12-02',
     });
   });
 
   it('can keep any day where nothing is left to do', () =>
-    expect(movePromise(bench, [], { jobId: 7, to: '2026-12-01' })).toEqual({
+    expect(movedPromise(bench, [], { jobId: 7, to: '2026-12-01' })).toEqual({
       short: null,
       earliest: '2026-12-01',
       pushed: [],
@@ -76,7 +76,7 @@ describe('a moved promise', () => {
     fc.assert(
       fc.property(work, fc.integer({ min: 0, max: 30 }), (all, later) => {
         const to = addDays(all[0]?.promisedOn ?? bench.today, later);
-        expect(movePromise(bench, all, { jobId: 1, to }).pushed).toEqual([]);
+        expect(movedPromise(bench, all, { jobId: 1, to }).pushed).toEqual([]);
       }),
     );
   });
@@ -88,7 +88,7 @@ describe('a moved promise', () => {
         if (moved === undefined) return;
         fc.pre(shortByPromise(bench, others).length === 0);
         const to = addDays(bench.today, days);
-        const answer = movePromise(bench, all, { jobId: 1, to });
+        const answer = movedPromise(bench, all, { jobId: 1, to });
         const kept = answer.short === null && answer.pushed.length === 0;
         // What the day it has now breaks already is not the move's doing.
         fc.pre(shortByPromise(bench, all).length === 0);
@@ -100,9 +100,9 @@ describe('a moved promise', () => {
   it('can be kept on the earliest day that it names', () => {
     fc.assert(
       fc.property(work, (all) => {
-        const { earliest } = movePromise(bench, all, { jobId: 1, to: bench.today });
+        const { earliest } = movedPromise(bench, all, { jobId: 1, to: bench.today });
         fc.pre(earliest !== null && shortByPromise(bench, all.slice(1)).length === 0);
-        const answer = movePromise(bench, all, { jobId: 1, to: earliest ?? '' });
+        const answer = movedPromise(bench, all, { jobId: 1, to: earliest ?? '' });
         expect([answer.short, answer.pushed]).toEqual([null, []]);
       }),
     );

@@ -16,7 +16,7 @@ export interface MovedPromise {
  * What the bench can keep once one job is promised for another day, all other promises as they are.
  * @param work all that is held; a job that is not among it has nothing left to do
  */
-export function movePromise(
+export function movedPromise(
   bench: Bench,
   work: readonly HeldWork[],
   { jobId, to }: { jobId: number; to: Day },

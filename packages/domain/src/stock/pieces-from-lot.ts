@@ -61,13 +61,16 @@ export function piecesFromLot(
   if (laid !== null) return byLayout(lot, laid);
   if (lot.panel === null || cut.sides === null) return byArea(lot, cut.pieces, panel);
   const within = panelsWithin(lot.panel, cut.sides);
-  const whole = lot.offcuts === undefined ? within : Math.floor(lot.measuredArea / panel);
-  const most = Math.min(within * (lot.offcuts ?? 1), whole);
+  const { offcuts } = lot;
+  const most =
+    offcuts === undefined
+      ? panelsOf(lot, lot.panel) * within
+      : Math.min(within * offcuts, Math.floor(lot.measuredArea / panel));
   if (most === 0)
     return { pieces: 0, by: 'panels', perUnit: cut.pieces, units: { count: 1, area: panel } };
-  return lot.offcuts === undefined
-    ? byPanels(lot, panelsOf(lot, lot.panel), within * cut.pieces)
-    : byOffcuts(lot, most, cut.pieces);
+  return offcuts === undefined
+    ? byBundle(lot, most / within, within * cut.pieces)
+    : byBundle(lot, most, cut.pieces);
 }
 
 /** Area of a lot in thousandths of mm² that goes for so many of its pieces, never more than is free. */
@@ -86,17 +89,6 @@ function byLayout({ freeArea, measuredArea }: LotToCut, laid: number): PiecesOfL
   };
 }
 
-/** Each panel of the bundle goes with its share of the area that somebody measured, or added up, for all of it. */
-function byPanels(
-  { freeArea, measuredArea }: LotToCut,
-  count: number,
-  perUnit: number,
-): PiecesOfLot {
-  const left = Math.min(count, divided(freeArea + count, count, measuredArea, 'down'));
-  const units = { count, area: measuredArea };
-  return { pieces: left * perUnit, by: 'panels', perUnit, units };
-}
-
 /** Where nobody counted them, the area says how many they are: a hundredth short of one more is a rounded figure. */
 function panelsOf(
   { panels, measuredArea }: LotToCut,
@@ -108,17 +100,17 @@ function panelsOf(
 }
 
 /**
- * Each of the pattern's panels goes with its share of the offcut's waste, so that what is left of one that is partly
- * used gives no more than its share. A thousandth lost each time one goes costs no panel.
+ * Of so many panels, each goes with its share of what was measured of all of them: its share of an offcut's waste, or
+ * of the area that somebody added up for a bundle. What is left of one that is partly used gives no more than its share.
+ * A thousandth lost each time one goes costs no panel.
  */
-function byOffcuts(
+function byBundle(
   { freeArea, measuredArea }: LotToCut,
-  most: number,
+  count: number,
   perUnit: number,
 ): PiecesOfLot {
-  const left = Math.min(most, divided(freeArea + most, most, measuredArea, 'down'));
-  const units = { count: most, area: measuredArea };
-  return { pieces: left * perUnit, by: 'panels', perUnit, units };
+  const left = Math.min(count, divided(freeArea + count, count, measuredArea, 'down'));
+  return { pieces: left * perUnit, by: 'panels', perUnit, units: { count, area: measuredArea } };
 }
 
 function byArea(lot: LotToCut, perUnit: number, area: number): PiecesOfLot {
@@ -126,7 +118,10 @@ function byArea(lot: LotToCut, perUnit: number, area: number): PiecesOfLot {
   return { pieces, by: 'area', perUnit, units: { count: 1, area } };
 }
 
-/** What can still be cut of a lot, where no layout says it: its usable share less what is gone. A ready panel is all usable. */
+/**
+ * What can still be cut of a lot, where no layout says it: its usable share less what is gone. A ready panel is usable
+ * from edge to edge.
+ */
 export function usableArea(lot: LotToCut): number {
   const { freeArea, measuredArea, usablePercent, drawnArea, panel, offcuts } = lot;
   if (panel !== null && offcuts === undefined) return freeArea;

@@ -1,10 +1,5 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
-
-/** The end of an earlier day: its date, and the instant at which it was over in the shop. */
-export interface DayOver {
-  on: string;
-  over: string;
-}
+import type { DayOver } from '../../day-in.ts';
 
 /** A job that is open, with what it needs by its estimate. */
 export interface JobRow {

@@ -1,15 +1,10 @@
 import type { Dated } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { Decimal } from 'decimal.js';
+import type { DayOver } from '../../day-in.ts';
 import { scaled } from '../../db/columns/scaled-decimal.ts';
 import type { JobEstimate } from '../job-estimate.ts';
-import {
-  readHoldings,
-  type BrokenRow,
-  type DayOver,
-  type Holding,
-  type JobRow,
-} from './job-holdings.ts';
+import { readHoldings, type BrokenRow, type Holding, type JobRow } from './job-holdings.ts';
 import { readStandIns } from './stand-ins-for-check.ts';
 import { withoutStoodFor } from './stood-for.ts';
 

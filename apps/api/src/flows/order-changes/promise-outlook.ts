@@ -1,5 +1,5 @@
 import type { PromiseOutlook } from '@hidewright/contract';
-import { movePromise, type Day, type LateWork, type MovedPromise } from '@hidewright/domain';
+import { movedPromise, type Day, type LateWork, type MovedPromise } from '@hidewright/domain';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { Customer } from '../../modules/customers/customer.entity.ts';
 import { Job } from '../../modules/jobs/job.entity.ts';
@@ -17,7 +17,7 @@ export async function promiseOutlook(
 ): Promise<PromiseOutlook> {
   const job = await work.em.findOneOrFail(Job, { orderId: order.id });
   const open = await openJobs(work.em);
-  const moved = movePromise(await benchToday(work), open, { jobId: job.id, to: by });
+  const moved = movedPromise(await benchToday(work), open, { jobId: job.id, to: by });
   const customer = await work.em.findOneOrFail(Customer, order.customerId);
   return {
     by,

@@ -24,7 +24,10 @@ export function whyNotTold(
   return `${customer.name} has no e-mail address. Enter one with the customer, or tell them yourself.`;
 }
 
-/** Puts a letter about an order into the outbox, where that was wanted. @throws {Problem} 422 when it cannot go by mail */
+/**
+ * Puts a letter about an order into the outbox, where that was wanted.
+ * @throws {Problem} 422 when it cannot go by mail
+ */
 export async function tellCustomer(
   work: Work,
   order: Order,

@@ -1,5 +1,5 @@
 import type { GoodsLineTyped } from '@hidewright/contract';
-import { countedWords, Exact, type HardwareUnit, type OfferTerms } from '@hidewright/domain';
+import { countedWords, Exact, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { sayArea } from '../../modules/stock/say-area.ts';
 import type { Workshop } from '../../modules/workshop/workshop.entity.ts';
@@ -25,16 +25,13 @@ export function mergedLine(
   const drafted = row.of === 'hardware' ? inWhatIsSold(both, terms) : both;
   const line = boughtLine(row, terms, drafted.toFixed());
   const typed = there !== undefined && there.unitPrice !== boughtLine(row, terms, before).unitPrice;
+  const { unit } = row;
   const say = (quantity: string) =>
-    row.of === 'hardware'
-      ? countedWords(quantity, row.unit as HardwareUnit)
-      : sayArea(new Decimal(quantity), areaUnit);
+    unit === 'mm2' ? sayArea(new Decimal(quantity), areaUnit) : countedWords(quantity, unit);
   return {
     line: typed ? { ...line, unitPrice: there.unitPrice } : line,
     notes: [
-      ...(drafted.eq(both)
-        ? soldNote(row.name, { terms, drafted: both, say })
-        : [`${row.name}: ${say(drafted.toFixed())} are drafted, as less is not sold.`]),
+      ...soldNote(row.name, { terms, asked: both, drafted, say }),
       ...(typed ? [`${row.name} keeps the price that was typed on its draft.`] : []),
     ],
   };
@@ -53,19 +50,25 @@ function inWhatIsSold(quantity: Decimal, { minimum, multiple }: OfferTerms): Dec
 
 interface Drafted {
   terms: OfferTerms;
+  asked: Decimal;
   drafted: Decimal;
   say: (quantity: string) => string;
 }
 
-/** Sides are only about as large as they are sold, so that an area stays as typed. */
-function soldNote(name: string, { terms, drafted, say }: Drafted): string[] {
+/**
+ * Where it is not sold in what was asked for. Sides are only about as large as they are sold, so that an area stays as
+ * typed.
+ */
+function soldNote(name: string, { terms, asked, drafted, say }: Drafted): string[] {
   const { minimum, multiple } = terms;
-  const least = minimum !== null && drafted.lt(minimum) ? [`at least ${say(minimum)}`] : [];
+  const least = minimum !== null && asked.lt(minimum) ? [`at least ${say(minimum)}`] : [];
   const whole =
-    multiple !== null && !drafted.mod(multiple).isZero() ? [`${say(multiple)} at a time`] : [];
-  const sold = [...least, ...whole];
-  if (sold.length === 0) return [];
+    multiple !== null && !asked.mod(multiple).isZero() ? [`${say(multiple)} at a time`] : [];
+  const sold = [...least, ...whole].join(' and ');
+  if (sold === '') return [];
   return [
-    `${name}: ${say(drafted.toFixed())} is drafted, as typed, but it is sold ${sold.join(' and ')}.`,
+    drafted.eq(asked)
+      ? `${name}: ${say(asked.toFixed())} is drafted, as typed, but it is sold ${sold}.`
+      : `${name}: ${say(drafted.toFixed())} is drafted, for it is sold ${sold}.`,
   ];
 }

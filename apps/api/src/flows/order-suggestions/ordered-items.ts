@@ -1,3 +1,4 @@
+import type { HardwareUnit } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 
 /** A thing that the shop buys, as its table and the ledger keep it: thousandths of mm², or pieces. */
@@ -6,7 +7,8 @@ export interface ItemRow {
   id: number;
   name: string;
   kind: 'leather' | 'hardware' | 'supplies';
-  unit: string;
+  /** What it is counted in: mm² of leather, else what one of it is. */
+  unit: HardwareUnit | 'mm2';
   price: number;
   pack_size: number;
   supplier_id: number | null;

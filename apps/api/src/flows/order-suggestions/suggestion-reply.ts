@@ -1,5 +1,5 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
-import { addDays, countWords, unitWord, type HardwareUnit } from '@hidewright/domain';
+import { addDays, countWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
 import { sayArea } from '../../modules/stock/say-area.ts';
@@ -38,13 +38,13 @@ export function suggestionReply(item: Suggested, around: Around): OrderSuggestio
 }
 
 function sayerOf({ row }: Suggested, { workshop }: Around): Say {
-  if (row.of === 'leather') {
+  const { unit } = row;
+  if (unit === 'mm2') {
     return (areaMm2) => sayArea(new Decimal(areaMm2), workshop.areaUnit);
   }
   return (count) => {
     // Below ten a rate such as 2.5 a week would lose its sense.
     const rounded = new Decimal(count).toDecimalPlaces(count < 10 ? 1 : 0).toFixed();
-    const unit = row.unit as HardwareUnit;
     return `${countWords(rounded)}${unit === 'piece' ? '' : ` ${unitWord(unit, rounded)}`}`;
   };
 }

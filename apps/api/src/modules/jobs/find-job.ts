@@ -11,11 +11,17 @@ export async function findJob(em: EntityManager, id: number): Promise<Job> {
 }
 
 /** Whether the order that a job is for was cancelled. */
-export async function isCancelled(
+async function isCancelled(
   em: EntityManager,
   { orderId }: Pick<Job, 'orderId'>,
 ): Promise<boolean> {
   return (await orderOf(em, orderId)).state === 'cancelled';
+}
+
+/** @throws {Problem} 409 unless what it took is on the bench, or its order was cancelled before it was finished */
+export async function requireBringsBack(em: EntityManager, job: Job): Promise<void> {
+  if (job.state !== 'finished' && (await isCancelled(em, job))) return;
+  requireJobState(job, 'at the bench', 'paused');
 }
 
 /** A job that somebody still wants. @throws {Problem} 404; 409 when its order was cancelled */

@@ -255,7 +255,7 @@ describe('drafting', () => {
     await sold();
     const few = await draft([lineFor(await rivets(), { quantity: '7' })]).expect(201);
     expect(few.body.orders[0].lines).toMatchObject([{ quantity: 100 }]);
-    expect(few.body.notes[0]).toMatch(/: 100 are drafted, as less is not sold\.$/);
+    expect(few.body.notes[0]).toMatch(/: 100 is drafted, for it is sold 100 at a time\.$/);
     await change('leathers', things.leatherId, { wholeForm: 'side', wholeAreaMm2: ft2(22) });
     const part = await draft([lineFor(await leather(), { quantity: ft2(30) })]).expect(201);
     expect(part.body.orders[0].lines[1]).toMatchObject({ areaMm2: ft2(30) });

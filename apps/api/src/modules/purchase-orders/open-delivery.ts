@@ -61,9 +61,10 @@ export class OpenDelivery {
   }
 
   /**
-   * Counts what came towards the line that ordered it, if it names one: of leather the area that is paid for, which
-   * is the marked one where there is one, since what is short of it is claimed and not awaited. More than was ordered is received all the
-   * same and told as over; only a line that was complete already takes nothing from somebody who may not have seen it.
+   * Counts what came towards the line that ordered it, if it names one: of leather the area that is paid for, which is
+   * the marked one where there is one, since what is short of it is claimed and not awaited. More than was ordered is
+   * received all the same and told as over; only a line that was complete already takes nothing from somebody who may
+   * not have seen it.
    */
   fill(came: Came, quantity: number, field: string): PurchaseLine | null {
     if (came.purchaseLineId === null) return null;

@@ -106,7 +106,7 @@ function readHardwareRows(em: EntityManager, { on, hardwareId }: Asked): Promise
   );
 }
 
-/** Leather that hangs there, and what has none left of which some is on order or promised: a nought is an answer too. */
+/** Leather that hangs there, or of which some is on order or promised: a nought is an answer too. */
 async function readLeathers(
   em: EntityManager,
   { hardwareId, leatherId }: Asked,

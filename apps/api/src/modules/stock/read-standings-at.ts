@@ -1,12 +1,6 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
+import type { DayOver } from '../../day-in.ts';
 import { standingsOf, type Promised, type Standings } from './standings.ts';
-
-interface At {
-  /** The day whose end is meant. */
-  on: string;
-  /** The instant at which it was over in the shop. */
-  over: string;
-}
 
 /** Everything that was there, held and awaited at the end of the day. */
 const then = `WITH
@@ -46,7 +40,7 @@ const leatherSql = `${then},
 /** How everything stood at the end of a day, read off the rows that say what moved, was held and came until then. */
 export async function readStandingsAt(
   em: EntityManager,
-  { on, over }: At,
+  { on, over }: DayOver,
   promised: Promised,
 ): Promise<Standings> {
   return standingsOf(

@@ -11,7 +11,7 @@ import {
   type StockStand,
 } from '../../testing/stock-invariants.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
-import { dayIn, endOfDay } from '../../day-in.ts';
+import { dayIn, dayOver } from '../../day-in.ts';
 import { readOwedToJobs } from '../../flows/check/owed-to-jobs.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { readStandingsAt } from './read-standings-at.ts';
@@ -282,7 +282,7 @@ async function endTheDay(): Promise<void> {
     ready.shop.clock.now().toISOString(),
   ]);
   for (const [day, stood] of days) {
-    const then = { on: day, over: endOfDay(timeZone, day).toISOString() };
+    const then = dayOver(timeZone, day);
     const owed = await readOwedToJobs(em, then);
     expect(told(await readStandingsAt(em, then, owed)), day).toEqual(stood);
   }

@@ -7,7 +7,7 @@ import {
   type StockLevels,
 } from '@hidewright/contract';
 import type { Context } from '../../context.ts';
-import { endOfDay } from '../../day-in.ts';
+import { dayOver } from '../../day-in.ts';
 import { readOwedToJobs } from '../../flows/check/owed-to-jobs.ts';
 import { invalid } from '../../http/problem.ts';
 import { serve, serveFile } from '../../http/serve.ts';
@@ -66,6 +66,6 @@ async function levelsOn(
 async function standingsOn({ em, today }: Work, on: string): Promise<Standings> {
   if (on === today) return readStandings(em, await readOwedToJobs(em));
   const { timeZone } = await em.findOneOrFail(Workshop, 1);
-  const then = { on, over: endOfDay(timeZone, on).toISOString() };
+  const then = dayOver(timeZone, on);
   return readStandingsAt(em, then, await readOwedToJobs(em, then));
 }

@@ -30,7 +30,7 @@ const standingOf = ({ reserved, free, onOrder, promised }: HardwareLevel['standi
   promised,
 ];
 
-/** What was there at the end of a day: leather in all and lot by lot, then hardware and supplies, then leather that was out. */
+/** What was there at the end of a day: leather in all and lot by lot, hardware and supplies, and leather that was out. */
 export function levelsSheet(workshop: Workshop, levels: StockLevels, values: boolean): ListSheet {
   const unit = areaSigns[workshop.areaUnit];
   const worth = withValue(values, column(`At cost, ${workshop.currency}`, 'money'));

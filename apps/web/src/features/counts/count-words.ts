@@ -26,7 +26,7 @@ export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry |
   const plain = readWhole(typed);
   return plain !== undefined && plain.length <= 8
     ? { quantity: Number(plain) }
-    : 'Enter how many pieces there are; 0 when there are none.';
+    : 'Enter how many there are, as a whole number; 0 when there are none.';
 }
 
 /** Whether what was typed so far may be the beginning of a figure. */

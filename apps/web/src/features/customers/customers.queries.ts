@@ -3,7 +3,7 @@ import { queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 import { everyPage } from '../../lib/every-page.ts';
 
-/** The customers, newest first; one page holds what a small shop has. */
+/** All customers, newest first. */
 export function customersQuery() {
   return queryOptions({
     queryKey: ['customers'],

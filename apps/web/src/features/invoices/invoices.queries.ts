@@ -9,12 +9,12 @@ import {
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { call } from '../../lib/api.ts';
 
-/** Invoices, newest first, page by page. */
 interface Wanted {
   state?: InvoiceState | undefined;
   customerId?: number | undefined;
 }
 
+/** Invoices, newest first, page by page. */
 export function invoicesQuery(wanted: Wanted = {}) {
   return infiniteQueryOptions({
     queryKey: ['invoices', 'list', wanted],

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { withPoint } from '../../lib/comma.ts';
 import { dropDraft, readDraft, writeDraft } from '../../lib/draft.ts';
 
 /** What is tapped on a step and not logged yet. */
@@ -45,12 +46,12 @@ export function clockMinutes(clockFrom: number, now: number): number {
 const minutesPattern = /^-?\d{1,5}(\.\d{1,2})?$/;
 
 export function isMinutes(text: string): boolean {
-  return text.trim() === '' || minutesPattern.test(text.trim().replace(',', '.'));
+  return text.trim() === '' || minutesPattern.test(withPoint(text));
 }
 
 /** As the contract wants them: no blank, no comma, no superfluous zero. */
 export function minutesToSend(text: string): string {
-  const plain = text.trim().replace(',', '.');
+  const plain = withPoint(text);
   return plain === '' ? '0' : String(Number(plain));
 }
 

@@ -1,5 +1,5 @@
 import type { Pattern, PatternDefinition } from '@hidewright/contract';
-import { countedWords } from '@hidewright/domain';
+import { countedWords, hardwarePers, perWords } from '@hidewright/domain';
 import { countText, percentText, unitPriceText } from '../../lib/formatting.ts';
 
 type Hardware = PatternDefinition['hardware'][number];
@@ -13,15 +13,7 @@ export const learningModels: Record<Learning['model'], string> = {
   cumulative: 'running average (Wright)',
 };
 
-const pers: Record<Supply['per'], string> = {
-  piece: 'for each piece',
-  hundred: 'for 100 pieces',
-  run: 'for the run',
-};
-export const perChoices = Object.entries(pers).map(([value, label]) => ({ value, label }));
-
-/** "for each piece": what a line of hardware is counted for. */
-export const perWord = (per: Supply['per'] = 'piece'): string => pers[per];
+export const perChoices = hardwarePers.map((value) => ({ value, label: perWords[value] }));
 
 const nameOf = (names: Names, id: number): string => names.get(id) ?? 'hardware no longer kept';
 
@@ -35,7 +27,7 @@ export function hardwareWords(
     unit === 'piece'
       ? `${countText(line.perPiece)} × ${name}`
       : `${countedWords(line.perPiece, unit)} of ${name}`,
-    ...(line.per === undefined || line.per === 'piece' ? [] : [pers[line.per]]),
+    ...(line.per === undefined || line.per === 'piece' ? [] : [perWords[line.per]]),
     ...(typeof line.fromStep === 'number' ? [fromStepWords(line.fromStep, work)] : []),
     ...(line.lossPercent === undefined ? [] : [`${percentText(line.lossPercent)} spoiled`]),
   ];
@@ -49,7 +41,7 @@ function fromStepWords(step: number, work: PatternDefinition['work']): string {
 
 /** Edge dye, 1.80 for 100 pieces; without its cost for whoever may not see it. */
 export function supplyWords({ name, cost, per }: Supply): string {
-  return cost === undefined ? name : `${name}, ${unitPriceText(cost)} ${pers[per]}`;
+  return cost === undefined ? name : `${name}, ${unitPriceText(cost)} ${perWords[per]}`;
 }
 
 /** With a brass ring: D-ring in place of Buckle */

@@ -1,4 +1,5 @@
 import { studyTimes, usualPrecision } from '@hidewright/domain';
+import { withPoint } from '../../lib/comma.ts';
 
 /** A stopwatch that keeps its laps: seconds to the hundredth, as text. */
 export interface Stopwatch {
@@ -36,7 +37,7 @@ type Typed = { readings: string[] } | { wrong: string };
 /** Reads "12.4 13 11,8": seconds with spaces, semicolons or line breaks between. */
 export function readTyped(text: string): Typed {
   const parts = text.split(/,\s+|[\s;]+/).filter((part) => part !== '');
-  const plain = parts.map((part) => part.replace(',', '.'));
+  const plain = parts.map((part) => withPoint(part));
   const wrong = plain.findIndex((part) => !isSeconds(part));
   if (wrong >= 0) return { wrong: parts[wrong] ?? '' };
   return { readings: plain.map((part) => String(Number(part))) };

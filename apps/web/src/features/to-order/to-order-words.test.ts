@@ -15,17 +15,17 @@ const item = (change: object) =>
 const side = { areaMm2: '2043866.88', form: 'side' };
 
 it('says quantities in their unit', () => {
-  expect(amountText('1250', { of: 'hardware', unit: 'piece' }, workshop)).toBe('1,250');
-  expect(amountText('2.54', { of: 'hardware', unit: 'm' }, workshop)).toBe('2.5 m');
-  expect(amountText('12', { of: 'hardware', unit: 'pair' }, workshop)).toBe('12 pairs');
-  expect(amountText('1', { of: 'hardware', unit: 'bottle' }, workshop)).toBe('1 bottle');
-  expect(amountText('2043866.88', { of: 'leather', unit: 'mm2' }, workshop)).toBe('22 ft²');
+  expect(amountText('1250', { unit: 'piece' }, workshop)).toBe('1,250');
+  expect(amountText('2.54', { unit: 'm' }, workshop)).toBe('2.5 m');
+  expect(amountText('12', { unit: 'pair' }, workshop)).toBe('12 pairs');
+  expect(amountText('1', { unit: 'bottle' }, workshop)).toBe('1 bottle');
+  expect(amountText('2043866.88', { unit: 'mm2' }, workshop)).toBe('22 ft²');
 });
 
 it('says how it is sold, and how many sides that is', () => {
   expect(soldWords(item({ least: '500' }), workshop)).toBe('packs of 100, at least 500');
   expect(soldWords(item({ multiple: '1' }), workshop)).toBe('');
-  const leather = { of: 'leather', unit: 'mm2', multiple: side.areaMm2, whole: side };
+  const leather = { unit: 'mm2', multiple: side.areaMm2, whole: side };
   expect(soldWords(item(leather), workshop)).toBe('whole sides of about 22 ft²');
   const belly = { ...side, form: 'belly' };
   expect(soldWords(item({ ...leather, whole: belly }), workshop)).toContain('whole bellies of');

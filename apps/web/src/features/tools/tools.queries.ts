@@ -11,7 +11,7 @@ import { infiniteQueryOptions, keepPreviousData, queryOptions } from '@tanstack/
 import { call } from '../../lib/api.ts';
 import { everyPage } from '../../lib/every-page.ts';
 
-/** Cutting dies and stamp plates, of one pattern or all of them; one page holds what a small shop's rack does. */
+/** Cutting dies and stamp plates, of one pattern or all of them. */
 export function toolsQuery(patternId?: number) {
   return queryOptions({
     queryKey: ['tools', 'list', patternId ?? 'all'],

@@ -1,3 +1,4 @@
+import { countedWords, unitWord } from '@hidewright/domain';
 import { returnFromJob, type Job, type JobHardware, type JobLot } from '@hidewright/contract';
 import { useState, type ReactNode } from 'react';
 import { z } from 'zod';
@@ -7,7 +8,7 @@ import { Dialog } from '../../../components/dialog.tsx';
 import { Form } from '../../../components/form.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { say } from '../../../components/toast.ts';
-import { areaText, countText } from '../../../lib/formatting.ts';
+import { areaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useReturnFromJob } from '../jobs.mutations.ts';
 
@@ -85,7 +86,8 @@ export function BringHardwareBack({ job, item }: { job: Job; item: JobHardware }
           <NumberField
             name="quantity"
             label="How many"
-            help={`${countText(item.taken)} are taken.`}
+            unit={item.unit === 'piece' ? undefined : unitWord(item.unit, 2)}
+            help={`Taken: ${countedWords(item.taken, item.unit)}.`}
           />
         </Form>
       )}

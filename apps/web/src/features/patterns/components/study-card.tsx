@@ -9,6 +9,7 @@ import { KeyFigures } from '../../../components/key-figures.tsx';
 import { Notice } from '../../../components/notice.tsx';
 import { say } from '../../../components/toast.ts';
 import { ApiProblem } from '../../../lib/api-problem.ts';
+import { withPoint } from '../../../lib/comma.ts';
 import { numberText } from '../../../lib/formatting.ts';
 import { useChangePattern } from '../patterns.mutations.ts';
 import { enoughWords, type Study } from '../time-study.ts';
@@ -69,7 +70,7 @@ export function StudyCard({ pattern, step, stepName, study, isOwner }: StudyCard
 const secondsText = (seconds: number): string => `${numberText(seconds.toFixed(4), 2)} s`;
 
 function readAllowance(text: string): number | undefined {
-  const plain = text.trim().replace(',', '.');
+  const plain = withPoint(text);
   return /^\d{1,2}(\.\d{1,2})?$/.test(plain) ? Number(plain) / 100 : undefined;
 }
 

@@ -1,11 +1,10 @@
-import type { HardwarePer } from '@hidewright/domain';
+import { perWords, type HardwarePer } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { Plus } from 'lucide-react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
-import { perWord } from '../pattern-words.ts';
 import { hardwareChoicesQuery, hardwareNamesQuery } from '../patterns.queries.ts';
 import { blankSwap } from '../typed-parts.ts';
 import { RemoveButton } from '../../../components/remove-button.tsx';
@@ -100,7 +99,7 @@ function SwapRow({ swap, lines, taken, kept, names, onRemove, word }: SwapRowPro
         <NumberField
           name={`${swap}.perPiece`}
           label="How many"
-          unit={perWord(replaced?.per)}
+          unit={perWords[replaced?.per ?? 'piece']}
           whenEmpty="text"
         />
       )}

@@ -15,7 +15,7 @@ interface ReceivedLotListProps {
   mayPrice: boolean;
 }
 
-/** The lots that came, each a card; of an order, one press adds another lot of the same leather, or of one not ordered. */
+/** The lots that came, each a card; of an order, one press adds another of the same leather, or of one not ordered. */
 export function ReceivedLotList(props: ReceivedLotListProps) {
   const { lines, leathers, tolerancePercent, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
