@@ -1,9 +1,8 @@
-import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { browser, closeBrowser, phone, still, watch, wide } from '../support/browser.ts';
+import { closeBrowser, phone, wide } from '../support/browser.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
-import { signInAs } from '../support/steps.ts';
+import { readApi, signedIn } from '../support/signed-in.ts';
 import { expectAccessible, expectNoOverflow, visit } from '../support/walk.ts';
 
 let hidewright: Hidewright;
@@ -24,24 +23,15 @@ interface Piece {
   onHand: number;
 }
 
-async function read<Reply>(page: Page, path: string): Promise<Reply> {
-  return (await (await page.request.get(`${hidewright.url}/api/${path}`)).json()) as Reply;
-}
-
-async function open(role: 'owner' | 'maker', viewport: typeof phone) {
-  const context = await (await browser()).newContext({ ...still, viewport });
-  const page = await context.newPage();
-  const complaints = watch(page);
-  await signInAs(page, hidewright.url, role);
-  return { page, complaints, close: () => context.close() };
-}
+const open = (role: 'owner' | 'maker', viewport: typeof phone) =>
+  signedIn(hidewright.url, role, viewport);
 
 test('a maker gives away from the shelf on a phone, and a new quote says what is left', async () => {
   const { page, complaints, close } = await open('maker', phone);
   await visit(page, `${hidewright.url}/stockroom/finished`);
   await expectNoOverflow(page);
   expect(await page.locator('main').innerText()).not.toContain('At cost');
-  const { items } = await read<{ items: Piece[] }>(page, 'finished-pieces?there=yes');
+  const { items } = await readApi<{ items: Piece[] }>(page, 'finished-pieces?there=yes');
   const piece = items.find(({ sort, onHand }) => sort === 'good' && onHand > 1) as Piece;
   await visit(page, `${hidewright.url}/stockroom/finished/${piece.id}`);
   await page.getByRole('heading', { level: 1, name: piece.patternName }).waitFor();
@@ -114,7 +104,7 @@ interface Order {
 
 test('an owner closes one line of an order, it is short, and is awaited after all', async () => {
   const { page, complaints, close } = await open('owner', wide);
-  const { items } = await read<{ items: Order[] }>(page, 'purchase-orders?awaited=yes');
+  const { items } = await readApi<{ items: Order[] }>(page, 'purchase-orders?awaited=yes');
   const isOpen = ({ toCome }: Order['lines'][number]) =>
     Number(toCome.areaMm2 ?? toCome.quantity) > 0;
   const order = items.find(({ lines }) => lines.filter(isOpen).length > 1) as Order;

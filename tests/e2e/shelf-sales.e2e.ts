@@ -1,9 +1,9 @@
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { browser, closeBrowser, phone, still, watch, wide } from '../support/browser.ts';
+import { closeBrowser, phone, wide } from '../support/browser.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
-import { signInAs } from '../support/steps.ts';
+import { readApi, signedIn } from '../support/signed-in.ts';
 import { expectAccessible, expectNoOverflow, visit } from '../support/walk.ts';
 
 let hidewright: Hidewright;
@@ -23,21 +23,12 @@ interface Piece {
   onHand: number;
 }
 
-async function read<Reply>(page: Page, path: string): Promise<Reply> {
-  return (await (await page.request.get(`${hidewright.url}/api/${path}`)).json()) as Reply;
-}
-
-async function open(role: 'owner' | 'maker', viewport: typeof phone) {
-  const context = await (await browser()).newContext({ ...still, viewport });
-  const page = await context.newPage();
-  const complaints = watch(page);
-  await signInAs(page, hidewright.url, role);
-  return { page, complaints, close: () => context.close() };
-}
+const open = (role: 'owner' | 'maker', viewport: typeof phone) =>
+  signedIn(hidewright.url, role, viewport);
 
 const shelf = async (page: Page) =>
-  (await read<{ items: Piece[] }>(page, 'finished-pieces?there=yes')).items;
-const now = (page: Page, { id }: Piece) => read<Piece>(page, `finished-pieces/${id}`);
+  (await readApi<{ items: Piece[] }>(page, 'finished-pieces?there=yes')).items;
+const now = (page: Page, { id }: Piece) => readApi<Piece>(page, `finished-pieces/${id}`);
 
 async function sellAs(page: Page, piece: Piece, typed: { customer?: string; quantity: number }) {
   await visit(page, `${hidewright.url}/stockroom/finished/${piece.id}`);
@@ -99,7 +90,7 @@ test('an owner sells seconds from the shelf, adds to the draft, issues it and is
   await page.getByRole('button', { name: 'Issue the invoice' }).click();
   await page.getByText(/^Invoice I-\d+ is issued\.$/).waitFor();
   const buyer = (
-    await read<{ customerId: number }>(page, `invoices/${page.url().split('/').pop()}`)
+    await readApi<{ customerId: number }>(page, `invoices/${page.url().split('/').pop()}`)
   ).customerId;
   const paper = await page.getByRole('link', { name: 'PDF' }).getAttribute('href');
   const file = await page.request.get(new URL(paper ?? '', hidewright.url).href);

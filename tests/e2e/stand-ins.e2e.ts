@@ -4,6 +4,7 @@ import { closeBrowser, phone } from '../support/browser.ts';
 import { keyboardAlone } from '../support/hands.ts';
 import type { Hidewright } from '../support/hidewright.ts';
 import { startDemo } from '../support/made-demo.ts';
+import { readApi } from '../support/signed-in.ts';
 import { signInAs } from '../support/steps.ts';
 import { expectAccessible, expectNoOverflow, visit, walk } from '../support/walk.ts';
 
@@ -25,7 +26,7 @@ walk('the maker takes on the ticket what may stand in for what is needed', async
   await page.context().clearCookies();
   await page.setViewportSize(phone);
   await signInAs(page, hidewright.url, 'maker');
-  const { items } = await read<{ items: { id: number; title: string; state: string }[] }>(
+  const { items } = await readApi<{ items: { id: number; title: string; state: string }[] }>(
     page,
     'jobs?open=true',
   );
@@ -45,7 +46,7 @@ walk('the maker takes on the ticket what may stand in for what is needed', async
   await page.getByText(`can stand in for ${kraft} · 30 taken · 10 free`).waitFor();
   await expectAccessible(page);
   await expectNoOverflow(page);
-  const ticket = await read<{ hardware: { name: string; taken: number }[] }>(
+  const ticket = await readApi<{ hardware: { name: string; taken: number }[] }>(
     page,
     `jobs/${job?.id}`,
   );
@@ -59,7 +60,7 @@ async function bringStandIn(page: Page): Promise<void> {
   const { id } = (await added.json()) as { id: number };
   const hardware = [{ hardwareId: id, quantity: 40 }];
   await page.request.post(`${hidewright.url}/api/receipts`, { data: { hardware } });
-  const { items } = await read<{ items: { id: number; name: string; version: number }[] }>(
+  const { items } = await readApi<{ items: { id: number; name: string; version: number }[] }>(
     page,
     'hardware?limit=200',
   );
@@ -69,10 +70,4 @@ async function bringStandIn(page: Page): Promise<void> {
     data: { standIns: [{ hardwareId: id, bothWays: false }] },
   });
   expect(changed.status(), await changed.text()).toBe(200);
-}
-
-async function read<Reply>(page: Page, path: string): Promise<Reply> {
-  const reply = await page.request.get(`${hidewright.url}/api/${path}`);
-  expect(reply.status(), await reply.text()).toBe(200);
-  return (await reply.json()) as Reply;
 }
