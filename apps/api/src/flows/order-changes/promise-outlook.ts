@@ -25,7 +25,7 @@ export async function promiseOutlook(
     sentence:
       job.state === 'finished'
         ? `${job.number} is finished: nothing is left to do at the bench.`
-        : sayKept(by, moved),
+        : [sayKept(by, moved), ...sayAwaited(order)].join(' '),
     earliest: moved.earliest,
     pushed: moved.pushed.map((late) => sayPushed(late, open)),
     cannotMail: whyNotTold(customer, mailAvailable),
@@ -41,6 +41,13 @@ function sayKept(by: Day, { short, earliest }: MovedPromise): string {
   const why =
     short === 0 ? 'its pieces still lie between two steps then' : `${sayHours(short)} are short`;
   return `The bench cannot do it by ${sayDay(by)}: ${why}. ${from}`;
+}
+
+/** The bench can have the hours and not be allowed to begin. */
+function sayAwaited({ awaits }: Order): string[] {
+  return awaits.length === 0
+    ? []
+    : [`It can begin once it has what it awaits: ${awaits.join(', ')}.`];
 }
 
 function sayPushed({ jobId, short }: LateWork, open: readonly OpenJob[]): string {
