@@ -34,6 +34,7 @@ export function ReceiveForm(props: ReceiveFormProps) {
   const { today } = useWorkshop();
   const [beaten, setBeaten] = useState(false);
   const lines = order?.lines ?? [];
+  const hardwareOnly = lines.length > 0 && lines.every((line) => line.of === 'hardware');
 
   async function receive(body: TypedDelivery) {
     setBeaten(false);
@@ -45,6 +46,19 @@ export function ReceiveForm(props: ReceiveFormProps) {
     }
   }
 
+  const lotList = (
+    <ReceivedLotList
+      key="lots"
+      lines={lines}
+      leathers={leathers}
+      tolerancePercent={tolerancePercent}
+      mayPrice={mayPrice}
+    />
+  );
+  const hardwareList = (
+    <ReceivedHardwareList key="hardware" lines={lines} hardware={hardware} mayPrice={mayPrice} />
+  );
+
   return (
     <Form
       schema={receiveDelivery.body}
@@ -55,13 +69,7 @@ export function ReceiveForm(props: ReceiveFormProps) {
       onSend={receive}
     >
       {beaten && <LookAgain onLookAgain={props.onLookAgain} onLooked={() => setBeaten(false)} />}
-      <ReceivedLotList
-        lines={lines}
-        leathers={leathers}
-        tolerancePercent={tolerancePercent}
-        mayPrice={mayPrice}
-      />
-      <ReceivedHardwareList lines={lines} hardware={hardware} mayPrice={mayPrice} />
+      {hardwareOnly ? [hardwareList, lotList] : [lotList, hardwareList]}
       {order && (
         <Checkbox
           name="nothingMore"

@@ -8,6 +8,7 @@ import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { WeighCount } from '../../../components/weigh-count.tsx';
+import { ReceivedLegend } from './received-legend.tsx';
 import { blankHardware, isOpen, type TypedHardware } from '../typed-delivery.ts';
 
 interface ReceivedHardwareListProps {
@@ -27,9 +28,10 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
       isOpen(line) &&
       !fields.some((row) => row.purchaseLineId === line.id),
   );
+  const aside = lines.length > 0 && left.length === 0 && fields.length === 0;
   return (
     <fieldset>
-      <legend className="mb-3 text-lg font-semibold">Hardware and supplies</legend>
+      <ReceivedLegend aside={aside}>Hardware and supplies</ReceivedLegend>
       <div className="space-y-4">
         {fields.map((field, at) => (
           <ReceivedHardware

@@ -6,6 +6,7 @@ import type { Choice } from '../../../components/select-field.tsx';
 import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { blankLot, isOpen, lotBack, nextLot, type TypedLot } from '../typed-delivery.ts';
+import { ReceivedLegend } from './received-legend.tsx';
 import { ReceivedLot } from './received-lot.tsx';
 
 interface ReceivedLotListProps {
@@ -21,6 +22,7 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
   const workshop = useWorkshop();
   const open = lines.filter((line) => line.of !== 'hardware' && isOpen(line));
+  const aside = lines.length > 0 && open.length === 0 && fields.length === 0;
   const { getValues } = useFormContext<{ lots: TypedLot[] }>();
 
   function addOf(line: PurchaseLine) {
@@ -38,7 +40,7 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
 
   return (
     <fieldset>
-      <legend className="mb-3 text-lg font-semibold">Leather</legend>
+      <ReceivedLegend aside={aside}>Leather</ReceivedLegend>
       <div className="space-y-4">
         {fields.map((field, at) => {
           const line = lines.find(({ id }) => id === field.purchaseLineId);
