@@ -11,10 +11,7 @@ export async function findJob(em: EntityManager, id: number): Promise<Job> {
 }
 
 /** Whether the order that a job is for was cancelled. */
-async function isCancelled(
-  em: EntityManager,
-  { orderId }: Pick<Job, 'orderId'>,
-): Promise<boolean> {
+async function isCancelled(em: EntityManager, { orderId }: Pick<Job, 'orderId'>): Promise<boolean> {
   return (await orderOf(em, orderId)).state === 'cancelled';
 }
 
