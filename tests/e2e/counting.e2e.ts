@@ -90,7 +90,7 @@ test('a maker counts bins blind on a phone, and the owner approves', async () =>
   // The beginning of a wrong figure is a figure: it is not sent, and the sheet is not handed in over it.
   await field.fill('');
   await field.pressSequentially('12.5');
-  const wrong = page.getByRole('alert').filter({ hasText: 'Enter how many pieces there are' });
+  const wrong = page.getByRole('alert').filter({ hasText: 'Enter how many there are' });
   await wrong.waitFor();
   await expectAccessible(page);
   await field.blur();

@@ -49,7 +49,12 @@ export async function enterCount(
 
 function countedOf({ lotId }: CountLine, { areaMm2, quantity, unmeasured }: Entry): number | null {
   if (lotId === null && (areaMm2 !== undefined || unmeasured === true)) {
-    throw invalid([{ field: 'quantity', message: 'Enter how many pieces there are.' }]);
+    throw invalid([
+      {
+        field: 'quantity',
+        message: 'Enter how many there are, as a whole number; 0 when there are none.',
+      },
+    ]);
   }
   if (lotId !== null && quantity !== undefined) {
     throw invalid([{ field: 'areaMm2', message: 'Enter the area that is there.' }]);
