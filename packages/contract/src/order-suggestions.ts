@@ -118,6 +118,8 @@ export const listOrderSuggestions = endpoint({
   reply: page(orderSuggestion).extend({
     /** How many are not due. */
     fine: z.int(),
+    /** Of what nothing could be said: a fault that is in the program's log. */
+    unclear: z.array(z.object({ ...thing, name: z.string() })),
     /** The shop's own starting values that these are worked out by. */
     servicePercent: z.string(),
     holdingPercent: z.string(),

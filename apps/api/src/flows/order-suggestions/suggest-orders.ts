@@ -40,8 +40,15 @@ export interface Suggested {
   coming: ComingStock;
 }
 
+/** A thing of which nothing can be said, such as one whose row was damaged. */
+interface Unclear {
+  row: ItemRow;
+  error: unknown;
+}
+
 export interface Suggestions {
   items: Suggested[];
+  unclear: Unclear[];
   workshop: Workshop;
   today: string;
 }
@@ -55,7 +62,10 @@ interface Known {
   owed: OwedToJobs;
 }
 
-/** What should be ordered of everything that is bought, in as many questions to the database whatever there is. */
+/**
+ * What should be ordered of everything that is bought, in as many questions to the database whatever there is. A thing
+ * of which it cannot be worked out is set aside: what is said of the others must not wait for it.
+ */
 export async function suggestOrders(work: Work): Promise<Suggestions> {
   const { em, today } = work;
   const rows = await readOrderedItems(em);
@@ -67,8 +77,15 @@ export async function suggestOrders(work: Work): Promise<Suggestions> {
     openLines: await readOpenLines(em, today),
     owed: (await readOwedByStart(work)).owed,
   };
-  const items = rows.map((row) => suggestFor(row, known));
-  return { items, workshop: known.workshop, today };
+  const [items, unclear]: [Suggested[], Unclear[]] = [[], []];
+  for (const row of rows) {
+    try {
+      items.push(suggestFor(row, known));
+    } catch (error) {
+      unclear.push({ row, error });
+    }
+  }
+  return { items, unclear, workshop: known.workshop, today };
 }
 
 /** The ledger counts leather in thousandths of mm². */

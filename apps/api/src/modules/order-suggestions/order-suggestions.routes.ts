@@ -16,7 +16,10 @@ export function orderSuggestionRoutes(context: Context): Router {
   const router = Router();
 
   serve(router, context, listOrderSuggestions, async (work, { query }) => {
-    const { items, ...around } = await suggestOrders(work);
+    const { items, unclear, ...around } = await suggestOrders(work);
+    for (const { row, error } of unclear) {
+      context.log.error({ err: error, of: row.of, id: row.id }, 'nothing to say of an order');
+    }
     const due = items.filter(({ suggestion }) => suggestion.state !== 'fine');
     const shown = (query.show === 'all' ? items : due).map((item) => suggestionReply(item, around));
     const { servicePercent, holdingPercent, orderCost } = around.workshop;
@@ -24,6 +27,7 @@ export function orderSuggestionRoutes(context: Context): Router {
       items: inTurn.flatMap((state) => shown.filter((each) => each.state === state)),
       next: null,
       fine: items.length - due.length,
+      unclear: unclear.map(({ row: { of, id, name } }) => ({ of, id, name })),
       servicePercent: servicePercent.toString(),
       holdingPercent: holdingPercent.toString(),
       orderCost: moneyText(orderCost),

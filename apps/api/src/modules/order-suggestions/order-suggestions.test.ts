@@ -72,6 +72,20 @@ describe('what to order', () => {
     });
   });
 
+  it('names a thing whose row was damaged, and says of the others all the same', async () => {
+    await inTransaction(shop.context, theProgram, async ({ em }) => {
+      await em.execute('PRAGMA ignore_check_constraints = ON');
+      await em.execute('UPDATE hardware SET pack_size = -1 WHERE id = ?', [things.hardwareId]);
+      await em.execute('PRAGMA ignore_check_constraints = OFF');
+    });
+    const { body } = await owner().get('/api/order-suggestions?show=all').expect(200);
+    expect(body.unclear).toMatchObject([{ of: 'hardware', id: things.hardwareId }]);
+    expect(body.items.map(({ of }: OrderSuggestionReply) => of)).toContain('leather');
+    expect(body.items).not.toContainEqual(
+      expect.objectContaining({ id: things.hardwareId, of: 'hardware' }),
+    );
+  });
+
   it('counts what is on order, and says when nothing is due', async () => {
     await orderMore(shop, things);
     const item = await rivets();

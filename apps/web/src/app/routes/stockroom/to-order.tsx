@@ -5,6 +5,7 @@ import { LinkButton } from '../../../components/link-button.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
 import { ToOrderList } from '../../../features/to-order/components/to-order-list.tsx';
+import { UnclearNotice } from '../../../features/to-order/components/unclear-notice.tsx';
 import { toOrderQuery } from '../../../features/to-order/to-order.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { StockroomNav } from './stockroom-nav.tsx';
@@ -23,7 +24,7 @@ export function Component() {
   const show = shown(search);
   const { isOwner } = useRole();
   const { data } = useSuspenseQuery(toOrderQuery(show));
-  const { items, fine, orderCost, holdingPercent, servicePercent } = data;
+  const { items, fine, unclear, orderCost, holdingPercent, servicePercent } = data;
   return (
     <>
       <PageHeader
@@ -38,6 +39,7 @@ export function Component() {
         }
       />
       <StockroomNav />
+      <UnclearNotice things={unclear} />
       {items.length === 0 ? (
         <EmptyState title="Nothing has to be ordered.">
           {fine > 0
