@@ -72,6 +72,8 @@ const heading = {
 export const quote = z
   .object({
     ...heading,
+    /** What was taken on from it was called off since. */
+    orderCancelled: z.boolean(),
     patternVersion: z.int().positive(),
     layoutId: id,
     layout,

@@ -113,12 +113,15 @@ describe('cancelling an order', () => {
 
   it('asks why, and is final', async () => {
     const order = await takenOn(ready);
+    const quote = `/api/quotes/${order.quoteId}`;
+    expect((await owner().get(quote).expect(200)).body.orderCancelled).toBe(false);
     const { seen } = await look(order.id);
     const silent = await press(order.id, { seen, why: ' ' }).expect(422);
     expect(silent.body.errors).toEqual([{ field: 'why', message: 'Say why it is cancelled.' }]);
     await cancel(order.id);
     const again = await press(order.id, { seen }).expect(409);
     expect(again.body.detail).toBe('O-0001 is cancelled already.');
+    expect((await owner().get(quote).expect(200)).body.orderCancelled).toBe(true);
     const reply = await owner()
       .post('/api/orders')
       .send({ quoteId: order.quoteId, promisedOn: '2026-12-16' })

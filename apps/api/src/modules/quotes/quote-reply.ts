@@ -28,6 +28,7 @@ export async function quoteReply(
     patternVersion: about.patternVersion,
     orderId: about.orderId,
     orderNumber: about.orderNumber,
+    orderCancelled: about.orderCancelled === 1,
     layout: JSON.parse(about.layout) as Layout,
     outlinePath: pathOf({ input: JSON.parse(about.laidOut) }),
     breaks,
@@ -76,6 +77,7 @@ interface About {
   laidOut: string;
   orderId: number | null;
   orderNumber: string | null;
+  orderCancelled: 0 | 1 | null;
   letter: string | null;
   linkExpiresAt: string | null;
   revisions: string;
@@ -86,6 +88,7 @@ async function readAbout({ em, now }: Work, quoteId: number): Promise<About> {
   const [about] = await em.execute<About[]>(
     `SELECT c.name AS customerName, c.email AS customerEmail, p.id AS patternId, p.name AS patternName,
       v.number AS patternVersion, l.result AS layout, l.input AS laidOut, o.id AS orderId, o.number AS orderNumber,
+      o.state = 'cancelled' AS orderCancelled,
       (SELECT json_object('state', state, 'recipient', recipient, 'sentAt', sent_at, 'lastError', last_error)
         FROM outgoing_mail WHERE subject_kind = 'quote' AND subject_id = q.id ORDER BY id DESC LIMIT 1) AS letter,
       (SELECT MAX(expires_at) FROM customer_link

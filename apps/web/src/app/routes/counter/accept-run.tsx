@@ -19,13 +19,14 @@ interface AcceptRunProps {
 /** From the question whether the shop can make it to the order that it takes on. */
 export function AcceptRun({ quote, quantity, option, className }: AcceptRunProps) {
   const navigate = useNavigate();
-  const { orderId, orderNumber, state, inHandsOn } = quote;
+  const { orderId, orderNumber, orderCancelled, state, inHandsOn } = quote;
   if (orderId !== null) {
     return (
       <div className={className}>
         <Card title="Taken on">
           <p>
-            As <TextLink to={`/counter/orders/${orderId}`}>{orderNumber}</TextLink>.
+            As <TextLink to={`/counter/orders/${orderId}`}>{orderNumber}</TextLink>
+            {orderCancelled ? ', which was cancelled. For another run, write another quote.' : '.'}
           </p>
         </Card>
       </div>
