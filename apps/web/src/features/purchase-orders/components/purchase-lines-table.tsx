@@ -99,27 +99,13 @@ interface LineActs {
   reopen: (line: PurchaseLine) => void;
 }
 
-function columnsFor(
+/** Of an order that was sent: what came of it, and what is still to come. */
+function arrivalColumns(
   workshop: Workshop,
   order: PurchaseOrder,
   acts: LineActs | undefined,
 ): Column<PurchaseLine>[] {
-  const { currency, today } = workshop;
   return [
-    {
-      id: 'name',
-      header: 'What',
-      value: (row) => row.name,
-      cell: (row) => <NameOf line={row} />,
-      onPhone: 'title',
-    },
-    {
-      id: 'ordered',
-      header: 'Ordered',
-      value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => goodsText(row, workshop, row.unit),
-      align: 'right',
-    },
     {
       id: 'received',
       header: 'Received',
@@ -136,13 +122,38 @@ function columnsFor(
         <LineProgress
           line={row}
           order={order}
-          today={today}
+          today={workshop.today}
           onChangeDay={acts && (() => acts.move(row))}
           onCloseLine={acts && (() => acts.close(row))}
           onReopen={acts && (() => acts.reopen(row))}
         />
       ),
     },
+  ];
+}
+
+function columnsFor(
+  workshop: Workshop,
+  order: PurchaseOrder,
+  acts: LineActs | undefined,
+): Column<PurchaseLine>[] {
+  const { currency } = workshop;
+  return [
+    {
+      id: 'name',
+      header: 'What',
+      value: (row) => row.name,
+      cell: (row) => <NameOf line={row} />,
+      onPhone: 'title',
+    },
+    {
+      id: 'ordered',
+      header: 'Ordered',
+      value: (row) => row.areaMm2 ?? row.quantity,
+      cell: (row) => goodsText(row, workshop, row.unit),
+      align: 'right',
+    },
+    ...(order.state === 'draft' ? [] : arrivalColumns(workshop, order, acts)),
     ...(order.total === undefined ? [] : priceColumns(currency, order)),
   ];
 }
