@@ -9,6 +9,8 @@ export const Exact = Decimal.clone({ precision: 40, rounding: Decimal.ROUND_HALF
 
 export interface Limits {
   min?: number | string;
+  /** Above it, and not at it. */
+  above?: number;
   max?: number | string;
   places?: number;
 }
@@ -31,7 +33,10 @@ export function readDecimal(text: unknown, field: string, limits: Limits = {}): 
   return value;
 }
 
-function checkLimits(value: Decimal, field: string, { min, max, places }: Limits): void {
+function checkLimits(value: Decimal, field: string, { min, above, max, places }: Limits): void {
+  if (above !== undefined && value.lte(above)) {
+    throw new InvalidInput(field, `Write ${field} as a number above ${above}.`);
+  }
   if (min !== undefined && value.lt(min)) {
     throw new InvalidInput(field, `Write ${field} as ${min} or more.`);
   }

@@ -66,11 +66,8 @@ function readCosts(input: FixedHolding | HoldingByPrice): Costs {
   return { demand, orderCost, holdingOf: (price) => price.times(rate) };
 }
 
-function readCost(text: DecimalText, field: string): Decimal {
-  const value = readDecimal(text, field, { min: 0, max: '1000000000000' });
-  if (value.isZero()) throw new InvalidInput(field, `Write ${field} as an amount above 0.`);
-  return value;
-}
+const readCost = (text: DecimalText, field: string): Decimal =>
+  readDecimal(text, field, { above: 0, max: '1000000000000' });
 
 const best = ({ demand, orderCost, holdingOf }: Costs, price: Decimal): Decimal =>
   demand.times(orderCost).times(2).div(holdingOf(price)).sqrt();

@@ -56,6 +56,16 @@ describe('stockCost', () => {
     );
   });
 
+  it('values what is left by itself where receipts come to parts of a cent', () => {
+    const pin = [{ in: '9', unitCost: '33.337' }, { out: '8' }];
+    expect(stockCost(pin, 'movingAverage')).toEqual({ costOfGoods: '266.70', value: '33.34' });
+    const dye = [{ in: '44.69', unitCost: '13.97' }, { out: '43.85' }];
+    expect(stockCost(dye, 'fifo').value).toBe('11.73');
+    // Half a cent on both sides: 427.275 and 226.825 of 654.10.
+    const halves = [{ in: '31', unitCost: '21.10' }, { out: '20.25' }];
+    expect(stockCost(halves, 'fifo')).toEqual({ costOfGoods: '427.28', value: '226.82' });
+  });
+
   it('takes parts of a hide', () => {
     const each = [{ in: '24.75', unitCost: '8.0000' }, { out: '4.5' }];
     expect(stockCost(each, 'fifo')).toEqual({ costOfGoods: '36.00', value: '162.00' });

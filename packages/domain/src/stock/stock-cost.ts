@@ -10,7 +10,7 @@ export type CostedMovement = { in: DecimalText; unitCost: DecimalText } | { out:
 export interface StockCost {
   /** of everything taken, 2 places */
   costOfGoods: DecimalText;
-  /** of what is left, 2 places; together with the cost of goods it is what all receipts cost */
+  /** of what is left, 2 places; where all receipts come to whole cents, it and the cost of goods come to them */
   value: DecimalText;
 }
 
@@ -22,26 +22,32 @@ interface Layer {
 /**
  * What was taken from stock cost, and what the rest is worth, movement by movement (perpetual). By
  * `fifo` the oldest receipt is taken first; by `movingAverage` each receipt makes a new average of
- * all that is there. Nothing is rounded on the way; the cost of goods is rounded half up at the end,
- * and the value is the rest of the rounded receipts, so that no cent is lost.
+ * all that is there. Nothing is rounded on the way, and both are rounded half up at the end; of two
+ * halves of one cent the cost of goods has it, so that no cent is gained or lost.
  * @throws InvalidInput where more is taken than is there
  */
 export function stockCost(movements: readonly CostedMovement[], method: CostMethod): StockCost {
   let layers: Layer[] = [];
-  let [received, taken] = [new Exact(0), new Exact(0)];
+  let [received, taken, there] = [new Exact(0), new Exact(0), new Exact(0)];
   for (const [at, movement] of movements.entries()) {
     if ('in' in movement) {
       const layer = readLayer(movement, at);
       received = received.plus(layer.cost);
-      layers = method === 'fifo' ? [...layers, layer] : [merge([...layers, layer])];
+      there = there.plus(layer.quantity);
+      if (method === 'fifo') layers.push(layer);
+      else layers = [merge([...layers, layer])];
     } else {
       const out = readQuantity(movement.out, `movements.${at}.out`);
-      checkEnough(layers, out, at);
+      if (out.gt(there)) throw tooLittle({ there, out, at });
+      there = there.minus(out);
       taken = taken.plus(takeFrom(layers, out));
     }
   }
   const costOfGoods = toPlaces(taken, 2);
-  return { costOfGoods, value: toPlaces(new Exact(toPlaces(received, 2)).minus(costOfGoods), 2) };
+  const left = received.eq(toPlaces(received, 2))
+    ? received.minus(costOfGoods)
+    : received.minus(taken);
+  return { costOfGoods, value: toPlaces(left, 2) };
 }
 
 function readLayer(receipt: { in: DecimalText; unitCost: DecimalText }, at: number): Layer {
@@ -50,11 +56,8 @@ function readLayer(receipt: { in: DecimalText; unitCost: DecimalText }, at: numb
   return { quantity, cost: unitCost.times(quantity) };
 }
 
-function readQuantity(text: DecimalText, field: string): Decimal {
-  const quantity = readDecimal(text, field, { min: 0 });
-  if (quantity.isZero()) throw new InvalidInput(field, `Write ${field} as a quantity above 0.`);
-  return quantity;
-}
+const readQuantity = (text: DecimalText, field: string): Decimal =>
+  readDecimal(text, field, { above: 0 });
 
 function merge(layers: readonly Layer[]): Layer {
   return layers.reduce((all, { quantity, cost }) => ({
@@ -63,14 +66,11 @@ function merge(layers: readonly Layer[]): Layer {
   }));
 }
 
-function checkEnough(layers: readonly Layer[], out: Decimal, at: number): void {
-  const there = layers.reduce((sum, { quantity }) => sum.plus(quantity), new Exact(0));
-  if (out.gt(there)) {
-    throw new InvalidInput(
-      `movements.${at}.out`,
-      `Movement ${at + 1} takes ${out.toFixed()}, and ${there.toFixed()} are there: take less, or receive first.`,
-    );
-  }
+function tooLittle({ there, out, at }: { there: Decimal; out: Decimal; at: number }): InvalidInput {
+  return new InvalidInput(
+    `movements.${at}.out`,
+    `Movement ${at + 1} takes ${out.toFixed()}, and ${there.toFixed()} are there: take less, or receive first.`,
+  );
 }
 
 /** Takes from the oldest layers, and says what it cost. */
