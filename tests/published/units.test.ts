@@ -1,4 +1,4 @@
-import { convert, footageToMm2, parseFootage } from '@hidewright/domain';
+import { convert, readFootage } from '@hidewright/domain';
 import { describe, expect, it } from 'vitest';
 
 describe('ounce and iron', () => {
@@ -28,9 +28,10 @@ describe('square foot', () => {
   });
 
   // Etherington & Roberts, Bookbinding and the Conservation of Books (1982), s.v. footage: hides are
-  // marked to a quarter of a foot, "4/1" for 4 1/4, by a raised figure in this program.
+  // marked to a quarter of a foot, "4/1" for 4 1/4.
   it('comes in quarters of 2.322576 dm²', () => {
-    const quarter = footageToMm2(parseFootage('4¹')).minus(footageToMm2(parseFootage('4')));
-    expect(convert(quarter, 'mm2', 'dm2').toFixed()).toBe('2.322576');
+    expect(readFootage('4/1')?.toFixed()).toBe('4.25');
+    const quarter = readFootage('4/1')?.minus(4) ?? '0';
+    expect(convert(quarter, 'ft2', 'dm2').toFixed()).toBe('2.322576');
   });
 });

@@ -38,7 +38,12 @@ export const unitPrice = decimalText(
   'Enter a price such as 0.17, not negative, with at most four decimals.',
 );
 /** An area in mm², to a thousandth. */
-export const areaMm2 = decimalText(12, 3, '1858060.8', 'Enter an area such as 24.75, 24¾ or 24³.');
+export const areaMm2 = decimalText(
+  12,
+  3,
+  '1858060.8',
+  'Enter an area such as 24.75, 24 3/4 or, in ft², 24³.',
+);
 export const signedAreaMm2 = decimalText(
   12,
   3,

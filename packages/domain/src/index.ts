@@ -14,6 +14,7 @@ export { normalLoss, normalQuantile } from './numbers/normal.ts';
 
 export * from './units/measures.ts';
 export * from './units/convert.ts';
+export * from './units/mixed-number.ts';
 export * from './units/footage.ts';
 export * from './units/rack-footage.ts';
 export * from './units/area-price.ts';

@@ -1,34 +1,22 @@
 import { describe, expect, it } from 'vitest';
-import {
-  areaFigure,
-  lengthFigure,
-  readArea,
-  readLength,
-  readMixedNumber,
-  readWeight,
-} from './units.ts';
+import { areaFigure, lengthFigure, readArea, readLength, readWeight } from './units.ts';
 
 describe('what a person types for a measure', () => {
-  it.each([
-    ['24.75', '24.75'],
-    ['24,75', '24.75'],
-    ['24¾', '24.75'],
-    ['24³', '24.75'],
-    ['24 3/4', '24.75'],
-    ['24-3/4', '24.75'],
-    ['¾', '0.75'],
-    ['5/8', '0.625'],
-    [' 11 ', '11'],
-  ])('reads %s as %s', (text, figure) => {
-    expect(readMixedNumber(text)?.toFixed()).toBe(figure);
-  });
-
-  it.each(['', '-1', '1/0', 'NaN', '1e3', '24 ¾ ¾', 'eleven', '0x10', 'Infinity', '1,250'])(
-    'refuses %s',
+  it.each(['24.75', '24,75', '24¾', '24³', '24/3', '24 3/4', '24-3/4'])(
+    'reads the area %s as 24.75 ft²',
     (text) => {
-      expect(readMixedNumber(text)).toBeUndefined();
+      expect(readArea(text, 'ft2')).toBe('2299350.24');
     },
   );
+
+  it.each(['', '-1', '24/4', 'NaN', 'eleven', '1,250'])('finds no area in "%s"', (text) => {
+    expect(readArea(text, 'ft2')).toBeUndefined();
+  });
+
+  it('reads the marks of a hide in square feet alone', () => {
+    expect(readArea('230,5', 'dm2')).toBe('2305000');
+    for (const mark of ['230³', '230/3']) expect(readArea(mark, 'dm2')).toBeUndefined();
+  });
 
   it('turns square feet into mm² exactly', () => {
     expect(readArea('24.7', 'ft2')).toBe('2294705.088');
@@ -45,6 +33,7 @@ describe('what a person types for a measure', () => {
     ['4 3/8"', 'mm', '111.125'],
     ['95 mm', 'in', '95'],
     ['4⅜', 'in', '111.125'],
+    ['9,5', 'mm', '9.5'],
   ] as const)('takes %s in a shop that measures in %s', (text, unit, mm) => {
     expect(readLength(text, unit)).toBe(mm);
   });

@@ -1,40 +1,26 @@
 import type { Decimal } from 'decimal.js';
-import { InvalidInput } from '../errors/domain-error.ts';
 import { Exact, toPlaces } from '../numbers/decimal-text.ts';
-import { asFt2, asMm2, type Ft2, MM2_PER_FT2, type Mm2 } from './measures.ts';
+import { asFt2, type Ft2, MM2_PER_FT2 } from './measures.ts';
+import { readMixedNumber } from './mixed-number.ts';
 
-const quarterMarks: Record<string, string> = {
-  '¹': '0.25',
-  '²': '0.5',
-  '³': '0.75',
-  '¼': '0.25',
-  '½': '0.5',
-  '¾': '0.75',
-  '1/4': '0.25',
-  '1/2': '0.5',
-  '2/4': '0.5',
-  '3/4': '0.75',
-};
 const raised = ['', '¹', '²', '³'];
 
 /**
- * Reads an area as it is marked on the flesh side: '24.75', '24³' (24 and three quarters),
- * '24 3/4', '24¾'. Between 0 and 100,000 ft².
- * @throws InvalidInput
+ * Reads an area in ft² as it is typed or copied from the flesh side: '24.75', '24 3/4', '24¾', or with the quarters
+ * after the feet, '24³' and '24/3'; 0 or more and below ten million. What is below 1 is a fraction: '3/4' is three
+ * quarters of a foot. Undefined where it is no area. The marks: Etherington & Roberts, Bookbinding and the
+ * Conservation of Books, 1982, s.v. footage, "4/1" for 4 1/4.
  */
-export function parseFootage(text: string): Ft2 {
-  const match = /^(\d{1,6})(?:(\.\d{1,6})|\s*([¹²³¼½¾])|\s+([123]\/[24]))?$/.exec(text.trim());
-  const [, whole, decimals = '', mark, fraction] = match ?? [];
-  const quarters = quarterMarks[mark ?? fraction ?? ''];
-  if (whole === undefined || (fraction !== undefined && quarters === undefined)) {
-    throw new InvalidInput('footage', 'Write the footage as 24.75, 24³ or 24 3/4.');
-  }
-  return asFt2(new Exact(whole + decimals).plus(quarters ?? 0));
+export function readFootage(text: string): Ft2 | undefined {
+  const ft2 = readMixedNumber(text) ?? readMark(text);
+  return ft2 && asFt2(ft2);
 }
 
-/** Square feet in mm². */
-export function footageToMm2(ft2: Ft2): Mm2 {
-  return asMm2(ft2.times(MM2_PER_FT2));
+function readMark(text: string): Decimal | undefined {
+  const [, feet, small = '', beside] =
+    /^(\d{1,7})(?:\s*([¹²³])|\/([1-3]))$/.exec(text.trim()) ?? [];
+  if (feet === undefined) return undefined;
+  return new Exact(beside ?? raised.indexOf(small)).div(4).plus(feet);
 }
 
 /** mm² in square feet, unrounded. */

@@ -6,6 +6,7 @@ const blank = { lotId: 1, countedAreaMm2: null, countedQuantity: null, unmeasure
 describe('what is typed while counting', () => {
   it('is an area of a lot, as people write it', () => {
     expect(readEntry('24³', true, 'ft2')).toEqual({ areaMm2: '2299350.24' });
+    expect(readEntry('24/3', true, 'ft2')).toEqual({ areaMm2: '2299350.24' });
     expect(readEntry('0', true, 'ft2')).toEqual({ areaMm2: '0' });
     expect(readEntry('-2', true, 'ft2')).toMatch(/^Enter the area in ft²/);
   });
@@ -26,7 +27,7 @@ describe('what is typed while counting', () => {
   });
 
   it('is not complained of while it may still become a figure', () => {
-    for (const half of ['24.', '24 3', '24 3/', '.']) {
+    for (const half of ['24.', '24/', '24 3', '24 3/', '.']) {
       expect(readEntry(half, true, 'ft2'), half).toBeTypeOf('string');
       expect(mayBecomeEntry(half, true, 'ft2'), half).toBe(half !== '.');
     }

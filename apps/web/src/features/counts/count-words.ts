@@ -1,7 +1,7 @@
 import type { CountLine } from '@hidewright/contract';
 import { readWhole, unclearComma } from '../../lib/comma.ts';
 import { areaText, countText } from '../../lib/formatting.ts';
-import { areaFigure, areaUnits, readArea, type AreaUnit } from '../../lib/units.ts';
+import { areaExamples, areaFigure, areaUnits, readArea, type AreaUnit } from '../../lib/units.ts';
 import type { Entry } from './entry-outbox.ts';
 
 type Counted = Pick<CountLine, 'lotId' | 'countedAreaMm2' | 'countedQuantity' | 'unmeasured'>;
@@ -20,7 +20,7 @@ export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry |
     const areaMm2 = readArea(typed, unit);
     return areaMm2 === undefined
       ? (unclearComma(typed) ??
-          `Enter the area in ${areaUnits[unit].sign}, such as 24.75 or 24³; 0 when it is gone.`)
+          `Enter the area in ${areaUnits[unit].sign}, such as ${areaExamples[unit]}; 0 when it is gone.`)
       : { areaMm2 };
   }
   const plain = readWhole(typed);
@@ -31,7 +31,7 @@ export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry |
 
 /** Whether what was typed so far may be the beginning of a figure. */
 export function mayBecomeEntry(text: string, ofLot: boolean, unit: AreaUnit): boolean {
-  return ['', '5', '/4', '3/4', '0', '00', '000'].some(
+  return ['', '1', '5', '/4', '3/4', '0', '00', '000'].some(
     (rest) => typeof readEntry(text + rest, ofLot, unit) !== 'string',
   );
 }

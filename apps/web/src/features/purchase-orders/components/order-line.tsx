@@ -46,7 +46,7 @@ export function OrderLine({ at, of, goods, offers, onRemove }: OrderLineProps) {
         />
       </div>
       {of === 'leather' ? (
-        <AreaField name={much} label="Area" help="24.75 or 24³" />
+        <AreaField name={much} label="Area" help={(examples) => examples} />
       ) : (
         <NumberField
           name={much}

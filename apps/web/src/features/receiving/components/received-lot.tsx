@@ -111,7 +111,7 @@ function Areas({ lot, tolerancePercent, hasOrder }: AreasProps) {
           label="Marked area"
           optional
           whenEmpty="null"
-          help="As stamped on it: 24.75 or 24³."
+          help={(examples) => `As stamped on it: ${examples}.`}
         />
         <AreaField name={`${lot}.measuredAreaMm2`} label="Measured area" help="As measured here." />
       </div>

@@ -73,7 +73,7 @@ export function AdjustForm({ item, onHand, unit = 'piece' }: AdjustFormProps) {
           <AreaField
             name="areaMm2"
             label="Measured now"
-            help="24.75 or 24³; 0 when it is used up."
+            help={(examples) => `${examples}; 0 when it is used up.`}
           />
         ) : (
           <>
