@@ -1,7 +1,6 @@
 import type { Decimal } from 'decimal.js';
 import { type DecimalText, Exact, readDecimal, toPlaces } from '../numbers/decimal-text.ts';
 import { readNumber } from '../numbers/read-number.ts';
-import { InvalidInput } from '../errors/domain-error.ts';
 import { type CheckedBreak, checkPriceBreaks, type PriceBreak } from '../pricing/price-breaks.ts';
 
 interface Ordering {
