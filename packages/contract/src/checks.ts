@@ -83,10 +83,12 @@ const shortForRuns = z
     id,
     name: z.string(),
     unit: z.enum(['mm2', 'piece']),
-    /** On hand, held for jobs and on order today; of leather, what can be cut of it. */
+    /** On hand, held for jobs and on order today; of leather, what whole panels can be cut from. */
     onHand: z.string(),
     reserved: z.string(),
     onOrder: z.string(),
+    /** Of leather, what could be cut as well, but gives no whole panel of what is short. */
+    ends: z.string().nullable(),
     /** For all the runs together. */
     needed: z.string(),
     /** What must be bought for them, beside what is on order; and how much of that is on a draft. */

@@ -123,7 +123,7 @@ describe('Can we make it?', () => {
     const [facts] = checkRuns(stock, [{ ...asked, leather }]);
     expect(facts!.leather.takes.map(({ lot: { tag } }) => tag)).toEqual(['L-1']);
     expect(leatherWords(facts!.leather, say)).toContain(
-      '120000 mm² free, 120000 mm² short. Too small for its panels: L-2, L-3, L-4 and 2 more. Buy',
+      '120000 mm² free in whole panels, 120000 mm² short. Too small for its panels: L-2, L-3, L-4 and 2 more. Buy',
     );
   });
 
@@ -155,7 +155,7 @@ describe('Can we make it?', () => {
       'Rivet: 150 needed, 40 free, 110 short. Buy 2 packs of 100, or receive them if they are here. Ordered from Fennbridge Fittings today, it is here by 2026-12-04.',
     );
     expect(leatherWords(facts!.leather, say)).toBe(
-      'Russet: 1560000 mm² needed, 1200000 mm² free, 360000 mm² short. Buy about 423529.412 mm² more, or receive it if it is here. Say who sells it, and the day can be told.',
+      'Russet: 1560000 mm² needed, 1200000 mm² free in whole panels, 360000 mm² short. Buy about 423529.412 mm² more, or receive it if it is here. Say who sells it, and the day can be told.',
     );
     expect(toolWords(facts!.tools[0]!)).toBe(
       'Cutting die: not in the shop yet. Order a cutting die.',

@@ -97,7 +97,7 @@ export function leatherWords(facts: LeatherFacts, say: Say): string {
     return `${leather.name}: ${[...take, ...rest, ...shades].join(' ')}`;
   }
   const { needed, free, short } = standing;
-  const head = `${leather.name}: ${area(needed)} needed, ${area(free)} free, ${area(short)} short.`;
+  const head = `${leather.name}: ${area(needed)} needed, ${area(free)} free in whole panels, ${area(short)} short.`;
   const missing = standing.buy - standing.drafted;
   const buy = missing > 0 ? buyLeatherWords(leather, missing, say) : null;
   const small = smallWords(facts);

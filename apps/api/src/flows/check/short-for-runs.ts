@@ -88,23 +88,30 @@ interface Around {
 
 function leatherShort(leather: LeatherStock, around: Around): ShortForRuns {
   const usable = usableOf(leather.lots);
+  const inPanels = Math.min(usable, takenOf(around.asked) + leather.owed);
   const { reserved } = around.counted;
+  const text = (quantity: number) => unscaled(quantity, 3).toFixed();
+  const { leatherId, name } = leather;
   return describe(
-    { of: 'leather', id: leather.leatherId, name: leather.name, unit: 'mm2' },
-    { ...around, counted: { onHand: usable + reserved, reserved } },
-    { ...leather, fromCustomer: false, text: (quantity) => unscaled(quantity, 3).toFixed() },
+    { of: 'leather', id: leatherId, name, unit: 'mm2', ends: text(usable - inPanels) },
+    { ...around, counted: { onHand: inPanels + reserved, reserved } },
+    { ...leather, fromCustomer: false, text },
   );
 }
 
+/** What the runs are given from the lots; where they are short, no whole panel is left beside it. */
+const takenOf = (asked: readonly AskedOf[]): number =>
+  asked.flatMap(({ run }) => run.facts.leather.takes).reduce((sum, { area }) => sum + area, 0);
+
 const itemShort = (item: ItemStock, around: Around): ShortForRuns =>
-  describe({ of: 'hardware', id: item.hardwareId, name: item.name, unit: 'piece' }, around, {
-    ...item,
-    fromCustomer: item.fromCustomer ?? false,
-    text: String,
-  });
+  describe(
+    { of: 'hardware', id: item.hardwareId, name: item.name, unit: 'piece', ends: null },
+    around,
+    { ...item, fromCustomer: item.fromCustomer ?? false, text: String },
+  );
 
 function describe(
-  head: Pick<ShortForRuns, 'of' | 'id' | 'name' | 'unit'>,
+  head: Pick<ShortForRuns, 'of' | 'id' | 'name' | 'unit' | 'ends'>,
   around: Around,
   stock: {
     pool: ItemStock['pool'];

@@ -89,6 +89,22 @@ describe('Can we make them?', () => {
     expect((await as('owner').get('/api/reservations')).body).toMatchObject({ items: [] });
   });
 
+  it('pictures leather by whole panels, and says what lies in ends', async () => {
+    const [{ patternId }, by] = [ready, '2026-12-16'];
+    const found = await check([
+      { patternId, quantity: 61, by },
+      { patternId, quantity: 90, by },
+    ]);
+    const [leather] = found.short.filter(({ of }) => of === 'leather');
+    const answers = found.runs.map((run) => run.answers[0]);
+    const sum = (part: 'freeNow' | 'short') =>
+      answers.reduce((total, answer) => total + Number(answer?.[part]), 0);
+    expect(sum('short')).toBeGreaterThan(0);
+    expect(Number(leather?.onHand)).toBe(sum('freeNow'));
+    expect(Number(leather?.ends)).toBeGreaterThan(0);
+    expect(Number(leather?.days.at(-1)?.left)).toBe(-sum('short'));
+  });
+
   it('counts on what is on order in time, and names the day by which the rest can be mended', async () => {
     await nameSuppliers();
     const number = await orderRivets(100, '2026-12-08');
@@ -247,7 +263,7 @@ describe('offcuts and ready panels on the rack', () => {
     expect(found?.lots).toEqual([]);
     expect(found?.answers[0]).toMatchObject({ freeNow: '0', free: '0', enough: false });
     expect(found?.answers[0]?.sentence).toBe(
-      'Oak tan 5–6 oz: 0.99 ft² needed, 0 ft² free, 0.99 ft² short. Too small for its panels: PN-1. Buy about 1.2 ft² more, or receive it if it is here. Say who sells it, and the day can be told.',
+      'Oak tan 5–6 oz: 0.99 ft² needed, 0 ft² free in whole panels, 0.99 ft² short. Too small for its panels: PN-1. Buy about 1.2 ft² more, or receive it if it is here. Say who sells it, and the day can be told.',
     );
   });
 });

@@ -73,7 +73,7 @@ describe('Can we make it?', () => {
       'Rivet 9 mm: 500 needed, 300 free, 200 short. Buy 2 packs of 100, or receive them if they are here. Say who sells it, and the day can be told.',
     );
     expect(answerAbout(answers, 'leather')?.sentence).toMatch(
-      /ft² needed, 9\.9 ft² free, .+ ft² short\. Buy about .+ ft² more, or receive it/,
+      /ft² needed, 9\.9 ft² free in whole panels, .+ ft² short\. Buy about .+ ft² more, or receive it/,
     );
     expect(answerAbout(answers, 'hours')?.sentence).toMatch(
       /needed by Wed 2 Dec 2026.* Promise .+ or later, or move another job\./,

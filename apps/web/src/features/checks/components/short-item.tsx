@@ -20,11 +20,20 @@ export function ShortItem({ item }: { item: ShortForRuns }) {
       <KeyFigures
         figures={[
           {
-            word: item.of === 'leather' ? 'to cut from, on hand' : 'on hand',
+            word: item.of === 'leather' ? 'in whole panels, on hand' : 'on hand',
             figure: say(item.onHand),
             note:
               Number(item.reserved) > 0 ? `${say(item.reserved)} of it held` : 'none of it held',
           },
+          ...(Number(item.ends ?? 0) > 0
+            ? [
+                {
+                  word: 'left in ends',
+                  figure: say(item.ends ?? '0'),
+                  note: 'too small for a panel',
+                },
+              ]
+            : []),
           { word: 'on order', figure: say(item.onOrder) },
           { word: 'needed for these', figure: say(item.needed) },
           ...(item.fromCustomer
