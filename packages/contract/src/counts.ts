@@ -52,8 +52,9 @@ export const countLine = z
     differenceQuantity: confidential(z.int().nullable()),
     /** The difference at cost. */
     differenceValue: confidential(z.string().nullable()),
-    /** What came or went between counting and now. */
-    movedSince: confidential(z.boolean()),
+    /** What came, or below 0 went, between counting and now: it is in the books already and stays. Null where nothing did. */
+    movedAreaMm2: confidential(z.string().nullable()),
+    movedQuantity: confidential(z.int().nullable()),
   })
   .meta({ id: 'CountLine' });
 export type CountLine = z.infer<typeof countLine>;

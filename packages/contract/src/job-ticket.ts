@@ -72,6 +72,10 @@ const jobHardware = z
     unit: z.enum(hardwareUnits),
     needed: count,
     held: count,
+    /** Of it in all, for whomever. */
+    onHand: count,
+    /** Held for jobs and not there, since a count found less. */
+    missing: count,
     free: z.int(),
     taken: z.int(),
     /** What the job needs and this may be taken in place of, alone or as a part of a kit. */

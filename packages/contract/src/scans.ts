@@ -4,7 +4,7 @@ import { id } from './fields.ts';
 
 export const scanned = z
   .object({
-    kind: z.enum(['lot', 'hardware', 'purchase order', 'job']),
+    kind: z.enum(['lot', 'hardware', 'purchase order', 'order', 'job']),
     id,
     /** As it is written where it belongs, whatever was typed. */
     tag: z.string(),
@@ -18,7 +18,7 @@ export type Scanned = z.infer<typeof scanned>;
 export const readScan = endpoint({
   method: 'GET',
   path: '/scans/{code}',
-  summary: 'What a scanned or typed tag belongs to: a lot, a bin, an order to a supplier or a job',
+  summary: 'What a scanned or typed tag belongs to: a lot, a bin, an order or a job',
   access: ['owner', 'maker', 'bookkeeper'],
   params: z.strictObject({ code: z.string().min(1).max(500) }),
   reply: scanned,

@@ -63,6 +63,12 @@ function differenceOf(sheet: StockCount, row: SheetLine): number | null {
     : countOutcome({ counted, bookThen, onHandNow: onHand, reserved }).difference;
 }
 
+/** What came or went since it was counted, as long as that is still to be judged. */
+function movedOf(sheet: StockCount, { book, onHand }: SheetLine): number | null {
+  if (sheet.state !== 'handed in' || book === null || book === onHand) return null;
+  return onHand - book;
+}
+
 async function toReplies(
   work: Work,
   sheet: StockCount,
@@ -73,9 +79,10 @@ async function toReplies(
 }
 
 function toReply(sheet: StockCount, row: SheetLine, value: string | null): CountLine {
-  const { counted, book: _, onHand, reserved: __, posted: ___, ...said } = row;
+  const { counted, book: _, onHand: __, reserved: ___, posted: ____, ...said } = row;
   const shown = shownOf(sheet, row);
   const difference = differenceOf(sheet, row);
+  const moved = movedOf(sheet, row);
   return {
     ...said,
     countedAreaMm2: areaOf(row, counted),
@@ -85,7 +92,8 @@ function toReply(sheet: StockCount, row: SheetLine, value: string | null): Count
     differenceAreaMm2: areaOf(row, difference),
     differenceQuantity: countOf(row, difference),
     differenceValue: value,
-    movedSince: sheet.state === 'handed in' && shown !== null && shown !== onHand,
+    movedAreaMm2: areaOf(row, moved),
+    movedQuantity: countOf(row, moved),
   };
 }
 

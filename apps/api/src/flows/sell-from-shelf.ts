@@ -6,6 +6,7 @@ import { logDeed } from '../modules/activity/activity-log.ts';
 import { Customer } from '../modules/customers/customer.entity.ts';
 import { findFinished, takeFinishedPieces } from '../modules/finished-pieces/finished-ledger.ts';
 import type { FinishedPiece } from '../modules/finished-pieces/finished-piece.entity.ts';
+import { requireMarkOf } from '../modules/finished-pieces/require-mark.ts';
 import { readOneFinished } from '../modules/finished-pieces/read-finished.ts';
 import { ShelfSale } from '../modules/finished-pieces/shelf-sale.entity.ts';
 import { findDraft } from '../modules/invoices/find-invoice.ts';
@@ -63,10 +64,8 @@ async function buyerOf({ em }: Work, piece: FinishedPiece, id: number): Promise<
   if (customer === null) {
     throw invalid([{ field, message: 'There is no such customer. Choose one of the list.' }]);
   }
-  if (piece.customerId === null || piece.customerId === id) return customer;
-  const marked = await em.findOneOrFail(Customer, piece.customerId);
-  const message = `These bear the mark of ${marked.name}, and are sold to nobody else. Choose ${marked.name}.`;
-  throw invalid([{ field, message }]);
+  await requireMarkOf(em, piece, id);
+  return customer;
 }
 
 async function shelfDraft(work: Work, customer: Customer, id: number): Promise<Invoice> {

@@ -15,6 +15,8 @@ interface ConfirmDialogProps {
   /** The act itself, as a verb: "Issue the invoice". */
   confirmWord: string;
   cancelWord?: string | undefined;
+  /** Where asking the same again is refused again: what to do then, which leads back to the page. */
+  refusedWord?: string | undefined;
   tone?: 'primary' | 'danger' | undefined;
   /** It stays open until this is done; what it throws is shown. */
   onConfirm: () => Promise<unknown>;
@@ -22,18 +24,30 @@ interface ConfirmDialogProps {
 
 /** Asks before what cannot be undone. What can be undone is not asked about: see `undoable` in toasts. */
 export function ConfirmDialog(props: ConfirmDialogProps) {
-  const { open, onOpenChange, title, children, confirmWord, cancelWord = 'Leave it', tone } = props;
+  const {
+    open,
+    onOpenChange,
+    title,
+    children,
+    confirmWord,
+    cancelWord = 'Leave it',
+    tone,
+    refusedWord,
+  } = props;
   const [busy, setBusy] = useState(false);
   const [problem, setProblem] = useState<string>();
+  const [settled, setSettled] = useState(false);
 
   async function confirm() {
     setBusy(true);
     setProblem(undefined);
+    setSettled(false);
     try {
       await props.onConfirm();
       onOpenChange(false);
     } catch (error) {
       setProblem(error instanceof ApiProblem ? error.detail : 'That did not work. Try again.');
+      setSettled(error instanceof ApiProblem && isSettled(error));
     } finally {
       setBusy(false);
     }
@@ -42,6 +56,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
   function change(next: boolean) {
     // Asked again, it starts afresh.
     setProblem(undefined);
+    setSettled(false);
     onOpenChange(next);
   }
 
@@ -60,13 +75,22 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
             </Notice>
           )}
           <div className="flex flex-wrap justify-end gap-2">
-            <AlertDialog.Close render={<Button>{cancelWord}</Button>} />
-            <Button tone={tone ?? 'primary'} busy={busy} onClick={() => void confirm()}>
-              {confirmWord}
-            </Button>
+            {settled && refusedWord !== undefined ? (
+              <AlertDialog.Close render={<Button tone="primary">{refusedWord}</Button>} />
+            ) : (
+              <>
+                <AlertDialog.Close render={<Button>{cancelWord}</Button>} />
+                <Button tone={tone ?? 'primary'} busy={busy} onClick={() => void confirm()}>
+                  {confirmWord}
+                </Button>
+              </>
+            )}
           </div>
         </AlertDialog.Popup>
       </AlertDialog.Portal>
     </AlertDialog.Root>
   );
 }
+
+/** It is another thing now, or in a state that does not allow it: the same question gets the same answer. */
+const isSettled = ({ status }: ApiProblem): boolean => status === 409 || status === 412;

@@ -157,6 +157,13 @@ describe('Can we make it?', () => {
     expect(leatherWords(facts!.leather, say)).toBe(
       'Russet: 1560000 mm² needed, 1200000 mm² free in whole panels, 360000 mm² short. Buy about 423529.412 mm² more, or receive it if it is here. Say who sells it, and the day can be told.',
     );
+    const { leather } = facts!;
+    const whole = { form: 'side', areaMm2: '200000' };
+    const buying = { ...nobody, terms: { ...nobody.terms, multiple: '200000' } };
+    const bySide = { ...leather, leather: { ...leather.leather, whole, buying } };
+    expect(leatherWords(bySide, say)).toContain(
+      ' Buy 3 more sides, or receive them if they are here. ',
+    );
     expect(toolWords(facts!.tools[0]!)).toBe(
       'Cutting die: not in the shop yet. Order a cutting die.',
     );

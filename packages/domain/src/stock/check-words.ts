@@ -120,7 +120,8 @@ function buyLeatherWords(leather: LeatherFacts['leather'], missing: number, say:
     toBuy.whole === null
       ? `about ${say.area(new Exact(toBuy.quantity))} more`
       : `${toBuy.whole.count} more ${wholes(toBuy.whole)}`;
-  return `Buy ${amount}${breakWords(toBuy)}, or receive it if it is here.`;
+  const here = (toBuy.whole?.count ?? 1) > 1 ? 'them if they are' : 'it if it is';
+  return `Buy ${amount}${breakWords(toBuy)}, or receive ${here} here.`;
 }
 
 /** "side", "hides", "bellies". */

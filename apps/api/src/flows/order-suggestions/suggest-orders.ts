@@ -35,6 +35,8 @@ export interface Suggested {
   sold: ItemSource;
   use: ItemUse;
   amounts: Amounts;
+  /** What jobs need beyond what they hold. */
+  promised: readonly Dated[];
   open: OpenLines;
   suggestion: OrderSuggestion;
   coming: ComingStock;
@@ -107,7 +109,7 @@ function suggestFor(row: ItemRow, known: Known): Suggested {
   });
   const { today } = known;
   const coming = comingStock({ ...amounts, promised, receipts, today, daily: dailyUse(use) });
-  return { row, sold, use, amounts, open, suggestion, coming };
+  return { row, sold, use, amounts, promised, open, suggestion, coming };
 }
 
 const inUnits = (row: ItemRow, all: readonly Dated[]): Dated[] =>

@@ -1,4 +1,4 @@
-import { dailyUse } from '@hidewright/domain';
+import { dailyUse, type Dated } from '@hidewright/domain';
 import { sayDay } from '../../modules/quotes/say-day.ts';
 import type { Suggested } from './suggest-orders.ts';
 
@@ -29,14 +29,21 @@ function standing(item: Suggested, say: Say, dueOn: string | null): string[] {
   return [`${have}: enough. It is ordered below ${say(point)}.`];
 }
 
-function haveWords({ amounts, suggestion }: Suggested, say: Say): string {
-  const { free, onOrder, promised } = amounts;
+function haveWords({ amounts, promised, suggestion }: Suggested, say: Say): string {
+  const { free, onOrder } = amounts;
   const { position } = suggestion;
-  const order = onOrder > 0 ? ` and ${say(onOrder)} on order` : '';
-  if (promised === 0) return `${freeWords(free, say)}${order}`;
-  const left =
-    position < 0 ? `${say(-position)} too few for that` : `which leaves ${say(position)}`;
-  return `${freeWords(free, say)}${order}, ${say(promised)} promised beyond what is held, ${left}`;
+  const have = `${freeWords(free, say)}${onOrder > 0 ? ` and ${say(onOrder)} on order` : ''}`;
+  if (amounts.promised === 0) return have;
+  if (position < 0) return `${say(-position)} missing for ${jobWords(promised)}. ${have}`;
+  return `${have}, ${say(amounts.promised)} promised beyond what is held, which leaves ${say(position)}`;
+}
+
+/** For whom it is missing: J-0001 Winter ale coasters; of many, the first. */
+function jobWords(promised: readonly Dated[]): string {
+  const [first, second, ...others] = [...new Set(promised.flatMap(({ paper }) => paper ?? []))];
+  if (first === undefined) return 'what is promised';
+  if (second === undefined) return first;
+  return others.length === 0 ? `${first} and ${second}` : `${first} and ${others.length + 1} more`;
 }
 
 const freeWords = (free: number, say: Say): string =>

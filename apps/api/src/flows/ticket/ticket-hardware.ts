@@ -3,7 +3,7 @@ import type { StandInStock } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { readStandIns } from '../check/stand-ins-for-check.ts';
-import { freeByItem, type JobStock } from './ticket-stock.ts';
+import { balancesByItem, type JobStock } from './ticket-stock.ts';
 
 interface TicketHardware {
   hardware: JobHardware[];
@@ -22,7 +22,7 @@ export async function ticketHardware(
   const own = new Set([...needed.keys(), ...also]);
   const ids = [...new Set([...own, ...standIns.partIds])];
   const found = await em.find(Hardware, { id: { $in: ids } }, { orderBy: { name: 'asc' } });
-  const free = await freeByItem(em, { hardwareId: { $in: ids } });
+  const balances = await balancesByItem(em, { hardwareId: { $in: ids } });
   const lines = found.filter(({ id }) => needed.has(id));
   const rows = found.map(({ id, name, unit }) => ({
     hardwareId: id,
@@ -30,7 +30,7 @@ export async function ticketHardware(
     unit,
     needed: needed.get(id) ?? 0,
     held: stock.held({ hardwareId: id }),
-    free: free.get(`hardware ${id}`) ?? 0,
+    ...(balances.get(`hardware ${id}`) ?? { onHand: 0, free: 0, missing: 0 }),
     taken: stock.taken({ hardwareId: id }),
     standsInFor: lines.flatMap((line) => inPlaceOf(line, { id, name }, standIns.of(line.id))),
   }));

@@ -54,7 +54,7 @@ export async function ticketLots(
     { $or: [{ leatherId }, { id: { $in: own } }] },
     { orderBy: { id: 'asc' } },
   );
-  const free = await freeByItem(em, { lotId: { $in: lots.map(({ id }) => id) } });
+  const balances = await balancesByItem(em, { lotId: { $in: lots.map(({ id }) => id) } });
   const rows = lots
     .map((lot) => ({
       lotId: lot.id,
@@ -65,7 +65,7 @@ export async function ticketLots(
       widthMm: lot.widthMm?.toString() ?? null,
       heightMm: lot.heightMm?.toString() ?? null,
       held: stock.held({ lotId: lot.id }),
-      free: free.get(`lot ${lot.id}`) ?? 0,
+      free: balances.get(`lot ${lot.id}`)?.free ?? 0,
       taken: stock.taken({ lotId: lot.id }),
     }))
     .filter(({ held, free, taken }) => held > 0 || free > 0 || taken > 0)
@@ -82,13 +82,24 @@ export async function ticketLots(
 
 type Which = { lotId: { $in: number[] } } | { hardwareId: { $in: number[] } };
 
-/** What is on hand and held for nobody, by `lot 7` or `hardware 3`. */
-export async function freeByItem(em: EntityManager, which: Which): Promise<Map<string, number>> {
+interface Balance {
+  onHand: number;
+  /** On hand and held for nobody. */
+  free: number;
+  /** Held and not there. */
+  missing: number;
+}
+
+/** What there is of each, by `lot 7` or `hardware 3`. */
+export async function balancesByItem(
+  em: EntityManager,
+  which: Which,
+): Promise<Map<string, Balance>> {
   const balances = await em.find(StockBalance, which);
   return new Map(
     balances.map(({ lotId, hardwareId, onHand, reserved }) => [
       lotId === null ? `hardware ${hardwareId}` : `lot ${lotId}`,
-      Math.max(0, onHand - reserved),
+      { onHand, free: Math.max(0, onHand - reserved), missing: Math.max(0, reserved - onHand) },
     ]),
   );
 }

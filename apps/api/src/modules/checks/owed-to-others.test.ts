@@ -63,7 +63,7 @@ it('what a job let go of is owed to it still, until it has taken it', async () =
 });
 
 it('what was held and is not there is owed to the job that goes without', async () => {
-  await takenOn(ready, 100, { evenIfShort: true });
+  const { job } = await takenOn(ready, 100, { evenIfShort: true });
   const looked = { of: 'hardware', hardwareId: ready.hardwareId, counted: 150, reason: 'looked' };
   await maker().post('/api/adjustments').send(looked).expect(201);
   expect(await promised()).toEqual(['50', '50']);
@@ -75,6 +75,13 @@ it('what was held and is not there is owed to the job that goes without', async 
       to: `/stockroom/hardware/${ready.hardwareId}`,
     }),
   );
+  const ticket = await maker().get(`/api/jobs/${job.id}`).expect(200);
+  expect(ticket.body.hardware).toMatchObject([{ held: 200, onHand: 150, missing: 50, free: 0 }]);
+  const suggested = await maker().get('/api/order-suggestions?show=all').expect(200);
+  const rivets = (suggested.body.items as { name: string; why: string }[]).find(
+    ({ name }) => name === 'Rivet 9 mm',
+  );
+  expect(rivets?.why).toMatch(/^50 missing for J-0001 [^.]+\. None free, below /);
   await awaitRivets(100, '2026-12-08');
   expect(await foundBy('2026-12-30')).toMatchObject({ free: '50', short: '50' });
 });

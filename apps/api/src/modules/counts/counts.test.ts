@@ -113,7 +113,7 @@ describe('a count', () => {
     await enter(id, lines[0], { areaMm2: ft2(18) }).expect(200);
     await handIn(id).expect(201);
     const { body } = await shop.as('maker').get(`/api/counts/${id}`).expect(200);
-    const hidden = ['bookAreaMm2', 'differenceAreaMm2', 'differenceValue', 'movedSince'];
+    const hidden = ['bookAreaMm2', 'differenceAreaMm2', 'differenceValue', 'movedQuantity'];
     for (const field of hidden) expect(body.lines[0]).not.toHaveProperty(field);
     expect(body).not.toHaveProperty('differenceValue');
     expect(body).not.toHaveProperty('broken');
@@ -127,6 +127,8 @@ describe('a count', () => {
     const more = [{ hardwareId, quantity: 100 }];
     await shop.as('owner').post('/api/receipts').send({ hardware: more }).expect(201);
     await handIn(id, true).expect(201);
+    const seen = ((await read(id)).lines as { id: number }[]).find((each) => each.id === line?.id);
+    expect(seen).toMatchObject({ bookQuantity: 500, movedQuantity: 100, movedAreaMm2: null });
     await approved(id);
     const { body } = await shop.as('owner').get(`/api/hardware/${hardwareId}`).expect(200);
     expect(body.onHand).toBe(580);

@@ -20,6 +20,7 @@ import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { describeInvoice } from '../invoices/describe-invoice.ts';
 import { countFinishedPieces, findFinished, takeFinishedPieces } from './finished-ledger.ts';
+import { requireMarkOf } from './require-mark.ts';
 import { readFinishedList, readFinishedMovements, readOneFinished } from './read-finished.ts';
 
 export function finishedPieceRoutes(context: Context): Router {
@@ -52,6 +53,7 @@ export function finishedPieceRoutes(context: Context): Router {
 
   serve(router, context, takeFinished, async (work, { params, body }) => {
     const piece = await findFinished(work.em, params.id);
+    if (body.as === 'sold') await requireMarkOf(work.em, piece, body.customerId);
     await takeFinishedPieces(work, piece, body);
     const words = { sold: 'sold', given: 'gave away', spoiled: 'wrote off' };
     return told(work, piece.id, (of) => `${words[body.as]} ${body.quantity} of ${of}`, body);

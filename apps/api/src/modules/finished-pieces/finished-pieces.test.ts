@@ -154,7 +154,9 @@ describe('pieces on the shelf', () => {
     await finish(53, 0);
     const { id } = await kind('good');
     const take = (body: object) => post(`finished-pieces/${id}/takings`, body);
-    const sold = await take({ as: 'sold', quantity: 1, reason: 'at the market' }).expect(201);
+    const buyer = { customerId: ready.customer.id };
+    const sold = await take({ as: 'sold', ...buyer, quantity: 1, reason: 'at the market' });
+    expect(sold.status).toBe(201);
     expect(sold.body).toMatchObject({ onHand: 2 });
     await take({ as: 'given', quantity: 1, reason: 'sample for Tern Street' }).expect(201);
     await take({ as: 'spoiled', quantity: 1, reason: 'fell into dye' }).expect(201);
@@ -169,6 +171,26 @@ describe('pieces on the shelf', () => {
     expect(all.reduce((sum, { value }) => sum + Math.round(Number(value) * 100), 0)).toBe(0);
     const log = (await as('owner').get('/api/activities')).body.items as { action: string }[];
     expect(log.map(({ action }) => action)).toContain('gave away 1 of Round coaster');
+  });
+
+  it('with a customer’s mark are sold over the counter to that customer alone', async () => {
+    await finish(52, 0);
+    const { id } = await kind('good');
+    const sell = (customerId?: number) =>
+      post(
+        `finished-pieces/${id}/takings`,
+        { as: 'sold', quantity: 1, reason: 'walk-in', customerId },
+        'maker',
+      );
+    const { name } = ready.customer;
+    const message = `These bear the mark of ${name}, and are sold to nobody else. Choose ${name}.`;
+    for (const buyer of [undefined, 999])
+      expect((await sell(buyer).expect(422)).body.errors).toEqual([
+        { field: 'customerId', message },
+      ]);
+    expect(await kind('good')).toMatchObject({ onHand: 2 });
+    await sell(ready.customer.id).expect(201);
+    expect(await kind('good')).toMatchObject({ onHand: 1 });
   });
 
   it('are counted, at what those beside them cost or the last did', async () => {
@@ -189,7 +211,10 @@ describe('pieces on the shelf', () => {
     await finish(52, 0);
     const { id, version } = await kind('good');
     const take = (quantity: number) =>
-      post(`finished-pieces/${id}/takings`, { as: 'sold', quantity, reason: 'at the market' });
+      post(`finished-pieces/${id}/takings`, {
+        ...{ as: 'sold', customerId: ready.customer.id },
+        ...{ quantity, reason: 'at the market' },
+      });
     const refused = await take(3).expect(409);
     expect(refused.body.detail).toBe(
       '2 of them are on the shelf, and 3 cannot be taken. Take fewer, or count the shelf first.',
@@ -218,7 +243,8 @@ describe('pieces on the shelf', () => {
   it('are sold once, however many reach for the last', async () => {
     await finish(51, 0);
     const { id } = await kind('good');
-    const sale = { as: 'sold', quantity: 1, reason: 'at the market' };
+    const buyer = { customerId: ready.customer.id };
+    const sale = { as: 'sold', ...buyer, quantity: 1, reason: 'at the market' };
     const replies = await Promise.all(
       Array.from({ length: 8 }, () => post(`finished-pieces/${id}/takings`, sale)),
     );

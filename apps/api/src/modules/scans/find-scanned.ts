@@ -24,6 +24,12 @@ const sources: Source[] = [
     to: (id) => `/stockroom/purchase-orders/${id}`,
   },
   {
+    kind: 'order',
+    sql: `SELECT id, number AS tag, title AS name FROM customer_order
+      WHERE number = ? COLLATE NOCASE ORDER BY number <> ? LIMIT 1`,
+    to: (id) => `/counter/orders/${id}`,
+  },
+  {
     kind: 'job',
     sql: `SELECT j.id, j.number AS tag, o.title AS name FROM job j JOIN customer_order o ON o.id = j.order_id
       WHERE j.number = ? COLLATE NOCASE ORDER BY j.number <> ? LIMIT 1`,

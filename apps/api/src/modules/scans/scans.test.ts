@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { writeBareJob } from '../../testing/bare-job.ts';
 import { ft2, orderMore, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
 
@@ -36,6 +37,12 @@ describe('a scan', () => {
     const order = await orderMore(shop, things);
     const { body: found } = await scan('P-0001').expect(200);
     expect(found).toMatchObject({ kind: 'purchase order', id: order.id });
+  });
+
+  it('opens a customer’s order', async () => {
+    const id = await writeBareJob(shop.context, 1);
+    const { body } = await scan('o-91').expect(200);
+    expect(body).toMatchObject({ kind: 'order', id, tag: 'O-91', to: `/counter/orders/${id}` });
   });
 
   it('that is no tag says what was read and what to do', async () => {

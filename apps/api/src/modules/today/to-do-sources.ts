@@ -1,26 +1,5 @@
-import type { ToDo } from '@hidewright/contract';
-
-type Role = 'owner' | 'maker' | 'bookkeeper';
-
-interface Row {
-  id: number;
-  number: string;
-  title: string;
-  customer: string;
-  day: string | null;
-  extra: string | null;
-}
-
-/** Where a kind of thing to do comes from: its rows, most pressing first, and what to say of each. */
-interface Source {
-  roles: readonly Role[];
-  /** `:today` is the shop's calendar day. */
-  sql: string;
-  say: (row: Row, today: string) => ToDo;
-}
-
-const by = (word: string, day: string | null) => (day === null ? null : { word, day });
-const past = (day: string | null, today: string) => day !== null && day < today;
+import { draftOrders, handedInCounts, openCounts, shortOfMark } from './stockroom-sources.ts';
+import { by, past, type Source } from './to-do-source.ts';
 
 export const sources: Source[] = [
   {
@@ -59,6 +38,7 @@ export const sources: Source[] = [
       to: `/stockroom/${row.number}/${row.id}`,
     }),
   },
+  handedInCounts,
   {
     roles: ['maker'],
     sql: `SELECT j.id, j.number, o.title, c.name AS customer, o.promised_on AS day, j.state AS extra
@@ -75,6 +55,7 @@ export const sources: Source[] = [
       to: `/bench/jobs/${row.id}`,
     }),
   },
+  openCounts,
   {
     roles: ['maker'],
     sql: `SELECT q.id, q.number, q.title, c.name AS customer, q.in_hands_on AS day, q.agreed_quantity AS extra
@@ -122,6 +103,7 @@ export const sources: Source[] = [
       to: `/stockroom/purchase-orders/${row.id}`,
     }),
   },
+  shortOfMark,
   {
     roles: ['owner'],
     sql: `SELECT o.id, o.number, o.title, c.name AS customer, o.promised_on AS day, o.quantity AS extra
@@ -184,20 +166,7 @@ export const sources: Source[] = [
       to: `/counter/quotes/${row.id}`,
     }),
   },
-  {
-    roles: ['owner'],
-    sql: `SELECT p.id, p.number, s.name AS title, s.name AS customer, NULL AS day, NULL AS extra
-      FROM purchase_order p JOIN supplier s ON s.id = p.supplier_id WHERE p.state = 'draft' ORDER BY p.id LIMIT 3`,
-    say: (row) => ({
-      kind: 'order',
-      title: 'Order',
-      detail: `${row.number} to ${row.customer} is ready to send`,
-      when: null,
-      late: false,
-      action: 'Look',
-      to: `/stockroom/purchase-orders/${row.id}`,
-    }),
-  },
+  draftOrders,
   {
     roles: ['owner'],
     sql: `SELECT t.id, t.number, t.kind || ' ' || t.number AS title, c.name AS customer,

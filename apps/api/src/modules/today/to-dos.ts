@@ -1,17 +1,18 @@
 import type { ToDo } from '@hidewright/contract';
 import type { Work } from '../../work.ts';
+import { priceDifferences } from './price-differences.ts';
+import type { Role, Row } from './to-do-source.ts';
 import { sources } from './to-do-sources.ts';
-
-type Role = 'owner' | 'maker' | 'bookkeeper';
 
 /** What waits for this role: late things first, otherwise in the order of the sources. */
 export async function toDos(work: Work, role: Role): Promise<ToDo[]> {
   const all: ToDo[] = [];
   for (const source of sources.filter((each) => each.roles.includes(role))) {
     const { sql, bindings } = withDay(source.sql, work.today);
-    const rows = await work.em.execute<Parameters<typeof source.say>[0][]>(sql, bindings);
+    const rows = await work.em.execute<Row[]>(sql, bindings);
     all.push(...rows.map((row) => source.say(row, work.today)));
   }
+  if (role === 'owner') all.push(...(await priceDifferences(work)));
   if (all.length === 0 && role === 'owner') return firstSteps(work);
   return [...all.filter((toDo) => toDo.late), ...all.filter((toDo) => !toDo.late)];
 }

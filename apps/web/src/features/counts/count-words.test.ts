@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { countedText, figureOf, mayBecomeEntry, readEntry, whatLies } from './count-words.ts';
+import {
+  countedText,
+  differencesGo,
+  figureOf,
+  mayBecomeEntry,
+  movedText,
+  readEntry,
+  whatLies,
+} from './count-words.ts';
 
 const blank = { lotId: 1, countedAreaMm2: null, countedQuantity: null, unmeasured: false };
 
@@ -13,7 +21,7 @@ describe('what is typed while counting', () => {
 
   it('is a whole number of pieces of hardware', () => {
     expect(readEntry(' 1,200 ', false, 'ft2')).toEqual({ quantity: 1200 });
-    for (const wrong of ['-1', '1.5', '12,5', '1,2', 'many', '123456789'])
+    for (const wrong of ['-1', '1.5', '12,5', '1,2', 'many'])
       expect(readEntry(wrong, false, 'ft2')).toMatch(/^Enter how many/);
   });
 
@@ -50,4 +58,26 @@ describe('what there is to count at a place', () => {
     expect(whatLies(0, 1)).toBe('1 bin');
     expect(whatLies(3, 12)).toBe('3 lots, 12 bins');
   });
+});
+
+it('says of what cannot be that it is too many', () => {
+  const said = 'That is too many: enter at most 10,000,000.';
+  expect(readEntry('9999999999', false, 'ft2')).toBe(said);
+  expect(readEntry('123456789', false, 'ft2')).toBe(said);
+  expect(readEntry('10000001', false, 'ft2')).toBe(said);
+  expect(readEntry('10000000', false, 'ft2')).toEqual({ quantity: 10_000_000 });
+});
+
+it('says what moved since it was counted', () => {
+  const moved = (movedQuantity: number | null, movedAreaMm2: string | null = null) =>
+    movedText({ movedQuantity, movedAreaMm2 }, 'ft2');
+  expect(moved(-100)).toBe('100 gone since');
+  expect(moved(1200)).toBe('1,200 come since');
+  expect(moved(null, '-92903.04')).toBe('1 ft² gone since');
+  expect(moved(null)).toBeUndefined();
+});
+
+it('says that one difference goes into the ledger, and that two go', () => {
+  expect(differencesGo(1, '−2.40 USD')).toBe('1 difference of −2.40 USD goes');
+  expect(differencesGo(2, '0.60 USD')).toBe('2 differences of 0.60 USD go');
 });

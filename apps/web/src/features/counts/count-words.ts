@@ -12,6 +12,9 @@ export function figureOf(line: Counted, unit: AreaUnit): string {
   return line.countedQuantity === null ? '' : String(line.countedQuantity);
 }
 
+/** The most that the contract takes. */
+const mostCounted = 10_000_000;
+
 /** What was typed as an entry; a sentence where it is none. */
 export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry | string {
   const typed = text.trim();
@@ -24,9 +27,12 @@ export function readEntry(text: string, ofLot: boolean, unit: AreaUnit): Entry |
       : { areaMm2 };
   }
   const plain = readWhole(typed);
-  return plain !== undefined && plain.length <= 8
-    ? { quantity: Number(plain) }
-    : 'Enter how many there are, as a whole number; 0 when there are none.';
+  if (plain === undefined)
+    return 'Enter how many there are, as a whole number; 0 when there are none.';
+  const quantity = Number(plain);
+  return quantity <= mostCounted
+    ? { quantity }
+    : `That is too many: enter at most ${countText(mostCounted)}.`;
 }
 
 /** Whether what was typed so far may be the beginning of a figure. */
@@ -49,6 +55,25 @@ export function whatLies(lots: number, bins: number): string {
     bins > 0 && (bins === 1 ? '1 bin' : `${bins} bins`),
   ];
   return parts.filter(Boolean).join(', ');
+}
+
+/** What came or went since it was counted: "100 gone since". */
+export function movedText(
+  { movedAreaMm2, movedQuantity }: Pick<CountLine, 'movedAreaMm2' | 'movedQuantity'>,
+  unit: AreaUnit,
+): string | undefined {
+  const gone = Number(movedAreaMm2 ?? movedQuantity ?? 0) < 0;
+  const amount = quantityText(
+    movedAreaMm2?.replace('-', ''),
+    typeof movedQuantity === 'number' ? Math.abs(movedQuantity) : null,
+    unit,
+  );
+  return amount === undefined ? undefined : `${amount} ${gone ? 'gone' : 'come'} since`;
+}
+
+/** "1 difference of −2.40 USD goes": what approving posts. */
+export function differencesGo(count: number, worth: string): string {
+  return count === 1 ? `1 difference of ${worth} goes` : `${count} differences of ${worth} go`;
 }
 
 export function quantityText(

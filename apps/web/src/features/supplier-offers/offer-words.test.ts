@@ -1,6 +1,6 @@
 import { bestBuy } from '@hidewright/domain';
 import { expect, it } from 'vitest';
-import { buyMoreText } from './offer-words.ts';
+import { buyMoreText, neededFault } from './offer-words.ts';
 
 const workshop = { areaUnit: 'ft2' } as Parameters<typeof buyMoreText>[2];
 const offer = {
@@ -20,4 +20,18 @@ it.each([
 ])('for %s it says “%s”', (needed, said) => {
   const [buy] = bestBuy({ needed, offers: [offer] });
   expect(buy && buyMoreText(buy, 'piece', workshop)).toBe(said);
+});
+
+it.each([
+  ['1.5', 'Enter how many are needed, as a whole number.'],
+  ['abc', 'Enter how many are needed, as a whole number.'],
+  ['0', 'Enter how many are needed, above 0.'],
+  ['999999999', 'That is too many: enter at most 99,999,999.'],
+])('says what is wrong with %s pieces', (typed, said) => {
+  expect(neededFault(typed, 'piece', 'ft2')).toBe(said);
+});
+
+it('says what is wrong with an area', () => {
+  expect(neededFault('abc', 'mm2', 'ft2')).toMatch(/^Enter the area in ft²/);
+  expect(neededFault('0', 'mm2', 'ft2')).toBe('Enter how much is needed, above 0.');
 });

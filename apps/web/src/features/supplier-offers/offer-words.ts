@@ -2,6 +2,7 @@ import type { SupplierOfferReply } from '@hidewright/contract';
 import type { OfferedBuy } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { areaText, countText, moneyText } from '../../lib/formatting.ts';
+import { areaExamples, areaUnits, readArea } from '../../lib/units.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
 type Unit = SupplierOfferReply['unit'];
@@ -9,6 +10,20 @@ type Unit = SupplierOfferReply['unit'];
 /** A quantity of an offer as people say it: 250, or 24.75 ft². */
 export function quantityText(quantity: string, unit: Unit, { areaUnit }: Workshop): string {
   return unit === 'mm2' ? areaText(quantity, areaUnit) : countText(Number(quantity));
+}
+
+/** What is wrong with a needed quantity that cannot be reckoned with. */
+export function neededFault(text: string, unit: Unit, areaUnit: Workshop['areaUnit']): string {
+  if (unit === 'mm2') {
+    return readArea(text, areaUnit) === undefined
+      ? `Enter the area in ${areaUnits[areaUnit].sign}, such as ${areaExamples[areaUnit]}.`
+      : 'Enter how much is needed, above 0.';
+  }
+  const typed = text.trim();
+  if (!/^\d+$/.test(typed)) return 'Enter how many are needed, as a whole number.';
+  return Number(typed) === 0
+    ? 'Enter how many are needed, above 0.'
+    : 'That is too many: enter at most 99,999,999.';
 }
 
 /** What is sold: from 100, in packs of 50. */

@@ -1,6 +1,13 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
 import { expect, it } from 'vitest';
-import { amountText, leadWords, methodWords, soldWords, wholeWords } from './to-order-words.ts';
+import {
+  amountText,
+  heldNote,
+  leadWords,
+  methodWords,
+  soldWords,
+  wholeWords,
+} from './to-order-words.ts';
 
 const workshop = { areaUnit: 'ft2' } as never;
 const item = (change: object) =>
@@ -20,6 +27,13 @@ it('says quantities in their unit', () => {
   expect(amountText('12', { unit: 'pair' }, workshop)).toBe('12 pairs');
   expect(amountText('1', { unit: 'bottle' }, workshop)).toBe('1 bottle');
   expect(amountText('2043866.88', { unit: 'mm2' }, workshop)).toBe('22 ft²');
+});
+
+it('says what of it is held, and what of that is missing', () => {
+  const note = (onHand: string, reserved: string) => heldNote({ onHand, reserved }, String);
+  expect(note('100', '0')).toBeUndefined();
+  expect(note('100', '90')).toBe('90 of it held');
+  expect(note('20', '90')).toBe('90 held, 70 of it missing');
 });
 
 it('says how it is sold, and how many sides that is', () => {

@@ -16,6 +16,18 @@ export function amountText(value: string, { unit }: Unit, { areaUnit }: Workshop
   return unit === 'piece' ? figure : `${figure} ${word}`;
 }
 
+/** How much of what is on hand is held; where a count found less than that, how much is missing. */
+export function heldNote(
+  { onHand, reserved }: Pick<Item, 'onHand' | 'reserved'>,
+  say: (value: string) => string,
+): string | undefined {
+  if (Number(reserved) === 0) return undefined;
+  const missing = new Decimal(reserved).minus(onHand);
+  return missing.greaterThan(0)
+    ? `${say(reserved)} held, ${say(missing.toFixed())} of it missing`
+    : `${say(reserved)} of it held`;
+}
+
 /** As it is sold: whole sides of about 22 ft², or packs of 100, at least 500. */
 export function soldWords(item: Item, workshop: Workshop): string {
   const { least, multiple, whole, of } = item;

@@ -7,7 +7,7 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { countedText, quantityText } from '../count-words.ts';
+import { countedText, movedText, quantityText } from '../count-words.ts';
 
 interface CountLinesTableProps {
   sheet: StockCount;
@@ -26,7 +26,7 @@ function columnsFor({ areaUnit, currency }: Workshop, withBooks: boolean): Colum
       id: 'book',
       header: 'Books',
       value: (row) => row.bookAreaMm2 ?? row.bookQuantity,
-      cell: (row) => quantityText(row.bookAreaMm2, row.bookQuantity, areaUnit) ?? '–',
+      cell: (row) => <Books line={row} unit={areaUnit} />,
       align: 'right',
     },
     {
@@ -69,6 +69,17 @@ function columnsFor({ areaUnit, currency }: Workshop, withBooks: boolean): Colum
       cell: (row) => row.countedByName ?? '–',
     },
   ];
+}
+
+/** What the books said when it was counted, and what moved since. */
+function Books({ line, unit }: { line: CountLine; unit: Workshop['areaUnit'] }) {
+  const moved = movedText(line, unit);
+  return (
+    <>
+      {quantityText(line.bookAreaMm2, line.bookQuantity, unit) ?? '–'}
+      {moved && <span className="block text-sm text-ink-soft">{moved}</span>}
+    </>
+  );
 }
 
 function differenceText(row: CountLine, unit: Workshop['areaUnit']): string {

@@ -10,6 +10,7 @@ import { moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useApproveCount, useCountAgain } from '../counts.mutations.ts';
 import { countQuery } from '../counts.queries.ts';
+import { differencesGo } from '../count-words.ts';
 import { CountLinesTable } from './count-lines-table.tsx';
 
 /** What was counted against the books: look, have lines counted again, approve. */
@@ -37,7 +38,7 @@ export function CountReview({ sheet, isOwner }: { sheet: StockCount; isOwner: bo
       say(`${sheet.title} is approved.`);
     } catch (refusal) {
       // Behind the question stands what is to be looked at now.
-      if (refusal instanceof ApiProblem && refusal.status === 412)
+      if (refusal instanceof ApiProblem && [409, 412].includes(refusal.status))
         await client.invalidateQueries({ queryKey: countQuery(sheet.id).queryKey });
       throw refusal;
     }
@@ -73,11 +74,12 @@ export function CountReview({ sheet, isOwner }: { sheet: StockCount; isOwner: bo
         onOpenChange={() => setAsking(undefined)}
         title={`Approve ${sheet.title}?`}
         confirmWord="Approve it"
+        refusedWord="Look at it again"
         onConfirm={approveIt}
       >
         {differences === 0
           ? 'Everything is as the books say; nothing moves.'
-          : `${differences === 1 ? '1 difference' : `${differences} differences`} of ${moneyText(sheet.differenceValue ?? '0')} ${currency} go into the ledger and cannot be taken out again.`}
+          : `${differencesGo(differences, `${moneyText(sheet.differenceValue ?? '0')} ${currency}`)} into the ledger and cannot be taken out again.`}
       </ConfirmDialog>
     </div>
   );

@@ -8,11 +8,21 @@ import { countText } from '../../../lib/formatting.ts';
 import { movedWords } from '../finished-words.ts';
 import { useTakeFinished } from '../finished-pieces.mutations.ts';
 
-const ways = [
-  { value: 'sold', label: 'Sold over the counter', detail: 'paid on the spot, no invoice' },
+const waysOf = ({ customerName }: FinishedPiece) => [
+  soldTo(customerName),
   { value: 'given', label: 'Given away' },
   { value: 'spoiled', label: 'Spoiled' },
 ];
+
+/** Pieces with a customer's mark are sold to that customer, whom the choice names. */
+const soldTo = (customerName: string | null) =>
+  customerName === null
+    ? { value: 'sold', label: 'Sold over the counter', detail: 'paid on the spot, no invoice' }
+    : {
+        value: 'sold',
+        label: `Sold over the counter to ${customerName}`,
+        detail: 'to nobody else, since they bear that mark; paid on the spot, no invoice',
+      };
 
 /** Takes pieces from the shelf, with a word on what became of them. */
 export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
@@ -25,11 +35,13 @@ export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
       submitSize="bench"
       again
       onSend={async (body) => {
-        const now = await take.mutateAsync({ params: { id: piece.id }, body });
+        const customerId = body.as === 'sold' ? piece.customerId : null;
+        const taken = { ...body, customerId };
+        const now = await take.mutateAsync({ params: { id: piece.id }, body: taken });
         say(`${countText(body.quantity)} ${movedWords[body.as]}, ${countText(now.onHand)} left.`);
       }}
     >
-      <RadioCards name="as" label="What becomes of them" cards={ways} />
+      <RadioCards name="as" label="What becomes of them" cards={waysOf(piece)} />
       <NumberField name="quantity" label="How many" unit="pieces" />
       <TextField
         name="reason"

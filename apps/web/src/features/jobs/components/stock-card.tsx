@@ -13,6 +13,7 @@ import { countText, rackAreaText, sizeText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useLetGo, useTakeForJob } from '../jobs.mutations.ts';
 import { jobQuery } from '../jobs.queries.ts';
+import { heldWords } from '../held-words.ts';
 import { standsInText } from '../stand-in-words.ts';
 import { BringHardwareBack, BringLeatherBack } from './bring-back.tsx';
 import { MixNotice } from './mix-notice.tsx';
@@ -221,7 +222,7 @@ function hardwareLine(item: JobHardware): string {
   const { needed, held, taken, free, unit } = item;
   const counted = (count: number) => countedWords(count, unit);
   const parts = [standsInText(item) || `${counted(needed)} needed`];
-  if (held > 0) parts.push(`${counted(held)} held`);
+  if (held > 0) parts.push(heldWords(item, counted));
   if (taken > 0) parts.push(`${counted(taken)} taken`);
   return [...parts, `${counted(free)} free`].join(' · ');
 }

@@ -30,8 +30,8 @@ export function ReceivedSummary({ received }: { received: ReplyOf<typeof receive
     >
       {short.length > 0 && (
         <Notice tone="attention" title="Short of the mark:" className="mb-4">
-          {short.map((line) => line.lotTag).join(', ')}. The owner sees it with the{' '}
-          {receipt?.purchaseOrderId === null ? 'delivery' : 'order'}.
+          {short.map((line) => line.lotTag).join(', ')}. The owner sees it{' '}
+          {receipt?.purchaseOrderId === null ? 'with the delivery' : 'on Today and with the order'}.
         </Notice>
       )}
       {over.length > 0 && (

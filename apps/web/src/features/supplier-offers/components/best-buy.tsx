@@ -5,7 +5,7 @@ import { PlainField } from '../../../components/plain-field.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { areaUnits, readArea } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { buyMoreText, quantityText } from '../offer-words.ts';
+import { buyMoreText, neededFault, quantityText } from '../offer-words.ts';
 
 type Unit = SupplierOfferReply['unit'];
 
@@ -23,7 +23,7 @@ export function BestBuy({ offers }: { offers: readonly SupplierOfferReply[] }) {
         label={unit === 'mm2' ? 'So much is needed' : 'So many are needed'}
         unit={sign}
         value={text}
-        error={wrong ? 'Enter how much is needed, above 0.' : undefined}
+        error={wrong ? neededFault(text, unit, workshop.areaUnit) : undefined}
         onChange={setText}
       />
       <div role="status">

@@ -5,7 +5,7 @@ import { KeyFigures } from '../../../components/key-figures.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { dayText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { amountText, wholeWords } from '../to-order-words.ts';
+import { amountText, heldNote, wholeWords } from '../to-order-words.ts';
 import { ByHand } from './by-hand.tsx';
 import { ComingWeeks } from './coming-weeks.tsx';
 import { HowWorkedOut } from './how-worked-out.tsx';
@@ -55,7 +55,7 @@ export function ItemCard({ item, mayOrder, children, ...rates }: ItemCardProps) 
 
 function figuresOf(item: Item, workshop: Workshop) {
   const say = (value: string) => amountText(value, item, workshop);
-  const { reserved, whole, quantity, usual, unitPrice, amount } = item;
+  const { whole, quantity, usual, unitPrice, amount } = item;
   const order = quantity === '0' ? usual : quantity;
   const price =
     amount === undefined || unitPrice === undefined
@@ -65,7 +65,7 @@ function figuresOf(item: Item, workshop: Workshop) {
     {
       word: 'on hand',
       figure: say(item.onHand),
-      note: Number(reserved) > 0 ? `${say(reserved)} of it held` : undefined,
+      note: heldNote(item, say),
     },
     { word: 'promised', figure: say(item.promised) },
     { word: 'on order', figure: say(item.onOrder) },

@@ -1,6 +1,7 @@
-import type { Today } from '@hidewright/contract';
+import type { ShortItem, Today } from '@hidewright/contract';
 import { Card } from '../../../components/card.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
+import { freeWords } from '../free-words.ts';
 
 /** Hardware and supplies of which little is free. */
 export function RunsShort({ short }: { short: NonNullable<Today['short']> }) {
@@ -15,16 +16,23 @@ export function RunsShort({ short }: { short: NonNullable<Today['short']> }) {
       ) : (
         <ul className="space-y-2">
           {short.map((item) => (
-            <li key={item.to} className="flex items-baseline justify-between gap-4">
-              <TextLink to={item.to}>{item.name}</TextLink>
-              <span className="text-right whitespace-nowrap">
-                <span className="font-semibold">{item.free}</span>
-                <span className="text-sm text-ink-soft"> free, keep {item.reorderAt}</span>
-              </span>
-            </li>
+            <Line key={item.to} item={item} />
           ))}
         </ul>
       )}
     </Card>
+  );
+}
+
+function Line({ item }: { item: ShortItem }) {
+  const { figure, rest } = freeWords(item);
+  return (
+    <li className="flex items-baseline justify-between gap-4">
+      <TextLink to={item.to}>{item.name}</TextLink>
+      <span className="text-right">
+        <span className="font-semibold">{figure}</span>{' '}
+        <span className="text-sm text-ink-soft">{rest}</span>
+      </span>
+    </li>
   );
 }

@@ -1,0 +1,97 @@
+import { by, type Source } from './to-do-source.ts';
+
+/** What is being counted, for whoever counts. */
+export const openCounts: Source = {
+  roles: ['maker'],
+  sql: `SELECT c.id, SUM(l.again AND l.counted_at IS NULL) AS number, c.title, '' AS customer, NULL AS day,
+      COUNT(l.counted_at) || ' of ' || COUNT(*) AS extra
+    FROM stock_count c JOIN count_line l ON l.count_id = c.id
+    WHERE c.state = 'open' GROUP BY c.id ORDER BY c.id LIMIT 3`,
+  say: (row) => ({
+    kind: 'count',
+    title: 'Count',
+    detail: `${row.title}: ${row.extra ?? ''} counted${againWords(Number(row.number))}`,
+    when: null,
+    late: false,
+    action: 'Go on',
+    to: `/stockroom/counts/${row.id}`,
+  }),
+};
+
+const againWords = (lines: number) => (lines === 0 ? '' : `, ${lines} to count once more`);
+
+/** Sheets that the maker handed in: one by its name, several as one ticket. */
+export const handedInCounts: Source = {
+  roles: ['owner'],
+  sql: `SELECT MIN(id) AS id, '' AS number, MIN(title) AS title, '' AS customer, NULL AS day, COUNT(*) AS extra
+    FROM stock_count WHERE state = 'handed in' HAVING COUNT(*) > 0`,
+  say: (row) => ({
+    kind: 'approve',
+    title: 'Counted',
+    detail: isOne(row.extra)
+      ? `The count of ${row.title} waits to be approved`
+      : `${row.extra ?? ''} counts wait to be approved`,
+    when: null,
+    late: false,
+    action: 'Look',
+    to: isOne(row.extra) ? `/stockroom/counts/${row.id}` : '/stockroom/counts',
+  }),
+};
+
+/** Orders that nobody has sent: one by its number, several as one ticket. */
+export const draftOrders: Source = {
+  roles: ['owner'],
+  sql: `SELECT MIN(p.id) AS id, MIN(p.number) AS number, MIN(s.name) AS title, MIN(s.name) AS customer,
+      NULL AS day, COUNT(*) AS extra
+    FROM purchase_order p JOIN supplier s ON s.id = p.supplier_id WHERE p.state = 'draft' HAVING COUNT(*) > 0`,
+  say: (row) => ({
+    kind: 'order',
+    title: 'Order',
+    detail: isOne(row.extra)
+      ? `${row.number} to ${row.customer} waits to be sent`
+      : `${row.extra ?? ''} orders wait to be sent`,
+    when: null,
+    late: false,
+    action: isOne(row.extra) ? 'Look' : 'Look at them',
+    to: isOne(row.extra)
+      ? `/stockroom/purchase-orders/${row.id}`
+      : '/stockroom/purchase-orders?state=draft',
+  }),
+};
+
+/**
+ * Orders of which lots came short of their mark beyond the tolerance of their delivery, as `compareArea` judges it, until
+ * each is claimed and its claim is credited or given up. What nobody claims within 30 days is let be.
+ */
+export const shortOfMark: Source = {
+  roles: ['owner'],
+  sql: `SELECT p.id, p.number, '' AS title, s.name AS customer, MIN(r.received_on) AS day,
+      SUM(c.id IS NULL) || ' ' || COUNT(c.id) AS extra
+    FROM receipt_line l JOIN receipt r ON r.id = l.receipt_id
+      JOIN purchase_order p ON p.id = r.purchase_order_id JOIN supplier s ON s.id = p.supplier_id
+      LEFT JOIN claimed_lot k ON k.receipt_line_id = l.id LEFT JOIN supplier_claim c ON c.id = k.supplier_claim_id
+    WHERE l.lot_id IS NOT NULL
+      AND (l.marked_area_mm2 - l.quantity) * 1000000 > r.tolerance_percent * l.marked_area_mm2
+      AND (c.state = 'open' OR (c.id IS NULL AND r.received_on >= date(:today, '-30 days')))
+    GROUP BY p.id ORDER BY SUM(c.id IS NULL) = 0, day, p.id LIMIT 3`,
+  say: (row) => {
+    const [unclaimed = 0, claimed = 0] = (row.extra ?? '').split(' ').map(Number);
+    return {
+      kind: 'claim',
+      title: unclaimed > 0 ? 'Short of its mark' : 'Claimed',
+      detail: `${row.number} from ${row.customer}: ${claimWords(unclaimed, claimed)}`,
+      when: by('received', row.day),
+      late: false,
+      action: unclaimed > 0 ? 'Claim' : 'Look',
+      to: `/stockroom/purchase-orders/${row.id}`,
+    };
+  },
+};
+
+function claimWords(unclaimed: number, claimed: number): string {
+  const lots = (count: number) => (count === 1 ? '1 lot' : `${count} lots`);
+  if (unclaimed > 0) return `${lots(unclaimed)} can be claimed`;
+  return `the claim for ${lots(claimed)} awaits its credit`;
+}
+
+const isOne = (count: string | null) => Number(count) === 1;
