@@ -10,6 +10,7 @@ import { Hardware } from '../hardware/hardware.entity.ts';
 import { KitPart } from '../hardware/kit-part.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
+import { keepPresentOffer, presentSupplier } from './present-offer.ts';
 import { SupplierOffer } from './supplier-offer.entity.ts';
 
 /** @throws {Problem} 404 */
@@ -19,7 +20,10 @@ export async function findOffer({ em }: Work, id: number): Promise<SupplierOffer
   return offer;
 }
 
-/** The first offer for a thing is the preferred one, whether or not it was asked for. */
+/**
+ * The first offer for a thing is the preferred one, whether or not it was asked for, unless the thing is bought from
+ * somebody else: then what is paid today is kept as their offer, and stays preferred until another is.
+ */
 export async function addOffer(
   work: Work,
   typed: BodyOf<typeof addSupplierOffer>,
@@ -28,7 +32,14 @@ export async function addOffer(
   const { minimum, multiple, preferred, ...plain } = typed;
   await requireThing(work, typed);
   await requireSupplier(work, supplierId, { leatherId, hardwareId });
-  const others = await work.em.count(SupplierOffer, { leatherId, hardwareId });
+  const thing = { leatherId, hardwareId };
+  const first = (await work.em.count(SupplierOffer, thing)) === 0;
+  const named = await presentSupplier(work, thing);
+  const bought = named !== null && named !== supplierId;
+  if (first && bought) {
+    const present = await keepPresentOffer(work, thing);
+    if (present !== null) await logOffer(work, present, 'kept what is paid today as the offer for');
+  }
   const offer = work.em.create(SupplierOffer, {
     ...plain,
     minimum: kept(typed, 'minimum', minimum),
@@ -37,7 +48,7 @@ export async function addOffer(
   });
   requireSound(offer);
   await work.em.flush();
-  if (preferred || others === 0) await preferOffer(work, offer);
+  if (preferred || (first && !bought)) await preferOffer(work, offer);
   await logOffer(work, offer, 'entered an offer for');
   return offer;
 }

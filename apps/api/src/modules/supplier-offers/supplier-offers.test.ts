@@ -54,6 +54,24 @@ describe('offers of suppliers', () => {
     ]);
   });
 
+  it('leave what is paid today preferred, and set it beside the first offer of somebody else', async () => {
+    const { supplierId } = things;
+    const buckle = { name: 'Buckle 20 mm', unitPrice: '0.62', packSize: 25, supplierId };
+    const { body: hardware } = await owner().post('/api/hardware').send(buckle).expect(201);
+    const asked = { supplierId: second, hardwareId: hardware.id };
+    await offer({ ...asked, breaks: [{ from: '1', price: '0.5' }] }).expect(201);
+    const list = await owner().get(`/api/supplier-offers?hardwareId=${hardware.id}`).expect(200);
+    expect(list.body.items).toMatchObject([
+      { supplierId, preferred: true, multiple: '25', breaks: [{ from: '25', price: '0.62' }] },
+      { supplierId: second, preferred: false },
+    ]);
+    const { body: due } = await owner().get('/api/order-suggestions?show=all').expect(200);
+    const item = due.items.find(
+      ({ id, of }: { id: number; of: string }) => of === 'hardware' && id === hardware.id,
+    );
+    expect(item).toMatchObject({ supplierId, multiple: '25' });
+  });
+
   it('keep an area of leather exactly, and its price per ft²', async () => {
     const { supplierId, leatherId } = things;
     const { body } = await offer({

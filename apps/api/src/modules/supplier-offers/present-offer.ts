@@ -1,0 +1,50 @@
+import type { Decimal } from 'decimal.js';
+import type { Work } from '../../work.ts';
+import { Hardware } from '../hardware/hardware.entity.ts';
+import { Leather } from '../leathers/leather.entity.ts';
+import { SupplierOffer } from './supplier-offer.entity.ts';
+
+type Thing = Pick<SupplierOffer, 'leatherId' | 'hardwareId'>;
+
+/** What the shop pays for a thing and to whom, as the thing itself says it. */
+interface Present {
+  /** null where it names nobody who sells it */
+  supplierId: number | null;
+  price: Decimal;
+  multiple: number | null;
+  /** the least that the price holds for */
+  from: string;
+}
+
+async function presentOf({ em }: Work, { leatherId, hardwareId }: Thing): Promise<Present> {
+  if (leatherId !== null) {
+    const { supplierId, pricePerFt2 } = await em.findOneOrFail(Leather, leatherId);
+    return { supplierId, price: pricePerFt2, multiple: null, from: '0' };
+  }
+  const hardware = await em.findOneOrFail(Hardware, hardwareId ?? 0);
+  const { supplierId, unitPrice, packSize } = hardware;
+  const multiple = packSize === 1 ? null : packSize;
+  return { supplierId, price: unitPrice, multiple, from: String(packSize) };
+}
+
+/** Who a thing says it is bought from; null where it names nobody. */
+export async function presentSupplier(work: Work, thing: Thing): Promise<number | null> {
+  return (await presentOf(work, thing)).supplierId;
+}
+
+/**
+ * Before somebody else’s first offer is compared with it: what the shop pays today becomes the offer of the supplier
+ * whom the thing names, and stays the preferred one.
+ */
+export async function keepPresentOffer(work: Work, thing: Thing): Promise<SupplierOffer | null> {
+  const { leatherId, hardwareId } = thing;
+  const { supplierId, price, multiple, from } = await presentOf(work, thing);
+  if (supplierId === null || price.isZero()) return null;
+  const present = work.em.create(SupplierOffer, {
+    ...{ leatherId, hardwareId, supplierId, multiple },
+    ...{ articleNumber: '', leadDays: null, minimum: null, preferred: true },
+    breaks: [{ from, price: price.toFixed() }],
+  });
+  await work.em.flush();
+  return present;
+}
