@@ -66,8 +66,10 @@ export const receipt = z
     freight: confidential(z.string()),
     duty: confidential(z.string()),
     sharedBy: z.enum(carriageBases),
-    /** Nothing of it has moved since, so what it cost can still be put right. */
+    /** Nothing of it was used since, so what it cost can still be put right. */
     untouched: z.boolean(),
+    /** In words, why what it cost stays as it is; null while it can be put right. */
+    costStaysBecause: z.string().nullable(),
     lines: z.array(receiptLine),
     version,
   })
@@ -174,7 +176,7 @@ export const receiveDelivery = endpoint({
 export const changeReceipt = endpoint({
   method: 'PATCH',
   path: '/receipts/{id}',
-  summary: 'Put right what a delivery cost, as long as nothing of it has moved',
+  summary: 'Put right what a delivery cost, as long as nothing of it was used',
   access: ['owner'],
   edits: true,
   params: idParams,

@@ -18,8 +18,8 @@ type Correction = BodyOf<typeof changeReceipt>;
 /**
  * Puts right what a delivery cost, once its papers are there: freight, duty, and what was paid for the goods. What it
  * put into the ledger is taken out and written again, so that both can be read there; what was used since keeps its
- * cost, and so a delivery of which something has moved stays as it is.
- * @throws {Problem} 409 when something of it has moved
+ * cost, and so a delivery of which something was used stays as it is.
+ * @throws {Problem} 409 when something of it was used
  */
 export async function correctReceipt(
   work: Work,
@@ -51,11 +51,8 @@ export async function correctReceipt(
 }
 
 async function requireUntouched(work: Work, receipt: Receipt): Promise<void> {
-  const { untouched } = await readOneReceipt(work.em, receipt.id);
-  if (untouched) return;
-  throw wrongState(
-    'Something of this delivery, or more of the same hardware, has moved since, so what it cost stays as it is.',
-  );
+  const { costStaysBecause } = await readOneReceipt(work.em, receipt.id);
+  if (costStaysBecause !== null) throw wrongState(costStaysBecause);
 }
 
 function lineOf(lines: ReceiptLine[], id: number): ReceiptLine {

@@ -5,6 +5,7 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
+import { whyCostStays, type MovedSince } from './why-cost-stays.ts';
 
 interface Asked {
   id?: number | undefined;
@@ -43,7 +44,7 @@ interface LineRow {
   carriage: number;
   material: number;
   claim_id: number | null;
-  moved_since: number;
+  moved_since: MovedSince | null;
 }
 
 /** Deliveries with everything that came, newest first. */
@@ -79,10 +80,16 @@ export async function readOneReceipt(em: EntityManager, id: number): Promise<Rec
   return found;
 }
 
-/** What moved since is anything in the ledger after the whole receipt. */
-const movedSince = `EXISTS (SELECT 1 FROM stock_movement m
-  WHERE (m.lot_id = l.lot_id OR m.hardware_id = l.hardware_id)
+/**
+ * What moved is anything in the ledger after the whole receipt. That more of the same came changes no average, since
+ * that is the sum of what came; first in, first out it does, because what is written again would be the newest layer.
+ */
+const moved = (kinds: string) => `EXISTS (SELECT 1 FROM stock_movement m
+  WHERE (m.lot_id = l.lot_id OR m.hardware_id = l.hardware_id) AND ${kinds}
     AND m.id > (SELECT MAX(o.movement_id) FROM receipt_line o WHERE o.receipt_id = l.receipt_id))`;
+const movedSince = `CASE WHEN ${moved(`m.kind <> 'receive'`)} THEN 'used'
+  WHEN (SELECT stock_value FROM workshop) = 'first in first out' AND ${moved(`m.kind = 'receive'`)}
+  THEN 'more came' END`;
 
 async function readLines(em: EntityManager, receiptIds: number[]): Promise<LineRow[]> {
   if (receiptIds.length === 0) return [];
@@ -113,7 +120,8 @@ function toReply(row: Row, lines: LineRow[]): ReceiptReply {
     freight: moneyText(unscaled(row.freight, 2)),
     duty: moneyText(unscaled(row.duty, 2)),
     sharedBy: row.shared_by,
-    untouched: lines.every((line) => line.moved_since === 0),
+    untouched: lines.every((line) => line.moved_since === null),
+    costStaysBecause: whyCostStays(lines),
     lines: lines.map((line) => toLine(line, tolerancePercent)),
     version: row.version,
   };

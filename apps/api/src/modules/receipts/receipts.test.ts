@@ -173,9 +173,40 @@ describe('what a delivery cost, put right', () => {
       .send({ of: 'hardware', hardwareId: things.hardwareId, counted: 399, reason: 'Counted' })
       .expect(201);
     const refused = await correct(id, version, { freight: '1.00' }).expect(409);
-    expect(refused.body.detail).toMatch(/has moved since/);
+    expect(refused.body.detail).toMatch(/^Some of it has moved since .*: Copper rivet/);
+    expect(refused.body.detail).toMatch(/Give a bill that comes now to the bookkeeper/);
     const read = await shop.as('owner').get(`/api/receipts/${id}`).expect(200);
     expect(read.body).toMatchObject({ untouched: false, freight: '0.00' });
+    expect(read.body.costStaysBecause).toBe(refused.body.detail);
+  });
+
+  it('stays open when more of the same came, and the average is the sum of both', async () => {
+    const first = await receive({ hardware: [rivets(400)] }).expect(201);
+    await receive({ hardware: [rivets(600)] }).expect(201);
+    const { id, version } = first.body.receipt;
+    const { body } = await correct(id, version, { freight: '10.00' }).expect(200);
+    expect(body).toMatchObject({ untouched: true, costStaysBecause: null });
+    const read = await shop.as('owner').get(`/api/hardware/${things.hardwareId}`).expect(200);
+    expect(read.body).toMatchObject({ onHand: 1000, valueOnHand: '172.50' });
+  });
+
+  it('stays where a newer layer lies on it, first in, first out', async () => {
+    const first = await receive({ hardware: [rivets(400)] }).expect(201);
+    await receive({ hardware: [rivets(600)] }).expect(201);
+    const valueStock = async (stockValue: string) => {
+      const { body } = await shop.as('owner').get('/api/workshop').expect(200);
+      await shop
+        .as('owner')
+        .patch('/api/workshop')
+        .set('If-Match', `"${body.version}"`)
+        .send({ stockValue })
+        .expect(200);
+    };
+    await valueStock('first in first out');
+    const { id, version } = first.body.receipt;
+    const refused = await correct(id, version, { freight: '10.00' }).expect(409);
+    expect(refused.body.detail).toMatch(/^More has come since, and stock is valued first in/);
+    await valueStock('moving average');
   });
 
   it('names only lines of its own', async () => {

@@ -64,6 +64,9 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
       {freight !== undefined && duty !== undefined && (
         <Carriage freight={freight} duty={duty} sharedBy={sharedWords[receipt.sharedBy]} />
       )}
+      {isOwner && receipt.costStaysBecause !== null && (
+        <p className="mt-1 max-w-prose text-sm text-ink-soft">{receipt.costStaysBecause}</p>
+      )}
       {asking === 'costs' && <ReceiptCostsDialog receipt={receipt} onClose={close} />}
       {asking === 'claim' && of && (
         <ClaimDialog order={of.order} receipt={receipt} onClose={close} />

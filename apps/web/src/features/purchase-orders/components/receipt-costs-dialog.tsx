@@ -22,7 +22,7 @@ export function ReceiptCostsDialog({
       open
       onOpenChange={onClose}
       title="What did it cost?"
-      description="In the ledger the receipt is taken out and written again at this cost, as long as nothing of it has moved."
+      description="In the ledger the receipt is taken out and written again at this cost, as long as nothing of it was used."
     >
       <Form
         schema={changeReceipt.body}
