@@ -69,7 +69,7 @@ export const receipt = z
     /** Nothing of it was used since, so what it cost can still be put right. */
     untouched: z.boolean(),
     /** In words, why what it cost stays as it is; null while it can be put right. */
-    costStaysBecause: z.string().nullable(),
+    staysBecause: z.string().nullable(),
     lines: z.array(receiptLine),
     version,
   })

@@ -51,8 +51,8 @@ export async function correctReceipt(
 }
 
 async function requireUntouched(work: Work, receipt: Receipt): Promise<void> {
-  const { costStaysBecause } = await readOneReceipt(work.em, receipt.id);
-  if (costStaysBecause !== null) throw wrongState(costStaysBecause);
+  const { staysBecause } = await readOneReceipt(work.em, receipt.id);
+  if (staysBecause !== null) throw wrongState(staysBecause);
 }
 
 function lineOf(lines: ReceiptLine[], id: number): ReceiptLine {

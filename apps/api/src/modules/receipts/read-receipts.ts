@@ -121,7 +121,7 @@ function toReply(row: Row, lines: LineRow[]): ReceiptReply {
     duty: moneyText(unscaled(row.duty, 2)),
     sharedBy: row.shared_by,
     untouched: lines.every((line) => line.moved_since === null),
-    costStaysBecause: whyCostStays(lines),
+    staysBecause: whyCostStays(lines),
     lines: lines.map((line) => toLine(line, tolerancePercent)),
     version: row.version,
   };

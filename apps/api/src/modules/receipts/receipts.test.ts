@@ -177,7 +177,7 @@ describe('what a delivery cost, put right', () => {
     expect(refused.body.detail).toMatch(/Give a bill that comes now to the bookkeeper/);
     const read = await shop.as('owner').get(`/api/receipts/${id}`).expect(200);
     expect(read.body).toMatchObject({ untouched: false, freight: '0.00' });
-    expect(read.body.costStaysBecause).toBe(refused.body.detail);
+    expect(read.body.staysBecause).toBe(refused.body.detail);
   });
 
   it('stays open when more of the same came, and the average is the sum of both', async () => {
@@ -185,7 +185,7 @@ describe('what a delivery cost, put right', () => {
     await receive({ hardware: [rivets(600)] }).expect(201);
     const { id, version } = first.body.receipt;
     const { body } = await correct(id, version, { freight: '10.00' }).expect(200);
-    expect(body).toMatchObject({ untouched: true, costStaysBecause: null });
+    expect(body).toMatchObject({ untouched: true, staysBecause: null });
     const read = await shop.as('owner').get(`/api/hardware/${things.hardwareId}`).expect(200);
     expect(read.body).toMatchObject({ onHand: 1000, valueOnHand: '172.50' });
   });

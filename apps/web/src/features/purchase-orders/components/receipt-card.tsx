@@ -64,8 +64,8 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
       {freight !== undefined && duty !== undefined && (
         <Carriage freight={freight} duty={duty} sharedBy={sharedWords[receipt.sharedBy]} />
       )}
-      {isOwner && receipt.costStaysBecause !== null && (
-        <p className="mt-1 max-w-prose text-sm text-ink-soft">{receipt.costStaysBecause}</p>
+      {isOwner && receipt.staysBecause !== null && (
+        <p className="mt-1 max-w-prose text-sm text-ink-soft">{receipt.staysBecause}</p>
       )}
       {asking === 'costs' && <ReceiptCostsDialog receipt={receipt} onClose={close} />}
       {asking === 'claim' && of && (
