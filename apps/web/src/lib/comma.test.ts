@@ -24,12 +24,15 @@ describe('a comma', () => {
     ['1,2500', '1.2500'],
     ['1,250', '1,250'],
     ['999,000', '999,000'],
+    ['1,250 mm', '1,250 mm'],
+    ['24,75 mm', '24.75 mm'],
   ])('in the measure %j reads as %j', (text, plain) => {
     expect(withPoint(text)).toBe(plain);
   });
 
   it('that may mean either is said with both', () => {
     expect(unclearComma(' 1,250 ')).toBe('Write 1250 or 1.25: 1,250 may mean either.');
+    expect(unclearComma('1,250 mm')).toBe('Write 1250 or 1.25: 1,250 may mean either.');
     expect(unclearComma('20,000')).toBe('Write 20000 or 20: 20,000 may mean either.');
     for (const clear of ['24,75', '0,125', '1250', '']) expect(unclearComma(clear)).toBeUndefined();
   });

@@ -1,5 +1,5 @@
 const thousands = /^\d{1,3}(,\d{3})+$/;
-const eitherWay = /^[1-9]\d{0,2},\d{3}$/;
+const eitherWay = /^[1-9]\d{0,2},\d{3}(?!\d)/;
 
 /** A whole number with or without commas between its thousands (1,250), without them; undefined where it is none. */
 export function readWhole(text: string): string | undefined {
@@ -19,8 +19,8 @@ export function withPoint(text: string): string {
 
 /** What to write instead of a figure whose comma may mean either; undefined where it is clear. */
 export function unclearComma(text: string): string | undefined {
-  const plain = text.trim();
-  if (!eitherWay.test(plain)) return undefined;
+  const [plain] = eitherWay.exec(text.trim()) ?? [];
+  if (plain === undefined) return undefined;
   const decimal = plain.replace(',', '.').replace(/\.?0+$/, '');
   return `Write ${plain.replace(',', '')} or ${decimal}: ${plain} may mean either.`;
 }

@@ -38,9 +38,12 @@ describe('what a person types for a measure', () => {
     expect(readLength(text, unit)).toBe(mm);
   });
 
-  it.each(['in', '4 ft', '-4 in', '4 3/0 in'])('finds no length in %s', (text) => {
-    expect(readLength(text, 'mm')).toBeUndefined();
-  });
+  it.each(['in', '4 ft', '-4 in', '4 3/0 in', '1,250', '1,250 mm', '1,250 in'])(
+    'finds no length in %s',
+    (text) => {
+      expect(readLength(text, 'mm')).toBeUndefined();
+    },
+  );
 
   it('shows again what was typed, tenth of a foot by tenth of a foot', () => {
     for (let tenths = 0; tenths < 300; tenths += 1) {
