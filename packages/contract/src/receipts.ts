@@ -66,8 +66,6 @@ export const receipt = z
     freight: confidential(z.string()),
     duty: confidential(z.string()),
     sharedBy: z.enum(carriageBases),
-    /** Nothing of it was used since, so what it cost can still be put right. */
-    untouched: z.boolean(),
     /** In words, why what it cost stays as it is; null while it can be put right. */
     staysBecause: z.string().nullable(),
     lines: z.array(receiptLine),

@@ -26,7 +26,7 @@ export async function correctReceipt(
   receipt: Receipt,
   typed: Correction,
 ): Promise<void> {
-  await requireUntouched(work, receipt);
+  await requireUnused(work, receipt);
   const readVersion = receipt.version;
   const lines = await work.em.find(
     ReceiptLine,
@@ -50,7 +50,7 @@ export async function correctReceipt(
   });
 }
 
-async function requireUntouched(work: Work, receipt: Receipt): Promise<void> {
+async function requireUnused(work: Work, receipt: Receipt): Promise<void> {
   const { staysBecause } = await readOneReceipt(work.em, receipt.id);
   if (staysBecause !== null) throw wrongState(staysBecause);
 }

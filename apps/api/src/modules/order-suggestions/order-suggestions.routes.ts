@@ -18,7 +18,10 @@ export function orderSuggestionRoutes(context: Context): Router {
   serve(router, context, listOrderSuggestions, async (work, { query }) => {
     const { items, unclear, ...around } = await suggestOrders(work);
     for (const { row, error } of unclear) {
-      context.log.error({ err: error, of: row.of, id: row.id }, 'nothing to say of an order');
+      context.log.error(
+        { err: error, of: row.of, id: row.id },
+        'what to order of a thing could not be worked out',
+      );
     }
     const due = items.filter(({ suggestion }) => suggestion.state !== 'fine');
     const shown = (query.show === 'all' ? items : due).map((item) => suggestionReply(item, around));

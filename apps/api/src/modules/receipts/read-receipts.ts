@@ -120,7 +120,6 @@ function toReply(row: Row, lines: LineRow[]): ReceiptReply {
     freight: moneyText(unscaled(row.freight, 2)),
     duty: moneyText(unscaled(row.duty, 2)),
     sharedBy: row.shared_by,
-    untouched: lines.every((line) => line.moved_since === null),
     staysBecause: whyCostStays(lines),
     lines: lines.map((line) => toLine(line, tolerancePercent)),
     version: row.version,

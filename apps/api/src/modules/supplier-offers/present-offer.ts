@@ -16,7 +16,8 @@ interface Present {
   from: string;
 }
 
-async function presentOf({ em }: Work, { leatherId, hardwareId }: Thing): Promise<Present> {
+/** At its own price, which quotes reckon with. */
+export async function presentOf({ em }: Work, { leatherId, hardwareId }: Thing): Promise<Present> {
   if (leatherId !== null) {
     const { supplierId, pricePerFt2 } = await em.findOneOrFail(Leather, leatherId);
     return { supplierId, price: pricePerFt2, multiple: null, from: '0' };
@@ -27,24 +28,21 @@ async function presentOf({ em }: Work, { leatherId, hardwareId }: Thing): Promis
   return { supplierId, price: unitPrice, multiple, from: String(packSize) };
 }
 
-/** Who a thing says it is bought from; null where it names nobody. */
-export async function presentSupplier(work: Work, thing: Thing): Promise<number | null> {
-  return (await presentOf(work, thing)).supplierId;
-}
-
 /**
  * Before somebody else’s first offer is compared with it: what the shop pays today becomes the offer of the supplier
  * whom the thing names, and stays the preferred one.
  */
-export async function keepPresentOffer(work: Work, thing: Thing): Promise<SupplierOffer | null> {
-  const { leatherId, hardwareId } = thing;
-  const { supplierId, price, multiple, from } = await presentOf(work, thing);
+export async function keepPresentOffer(
+  work: Work,
+  { leatherId, hardwareId }: Thing,
+  { supplierId, price, multiple, from }: Present,
+): Promise<SupplierOffer | null> {
   if (supplierId === null || price.isZero()) return null;
-  const present = work.em.create(SupplierOffer, {
+  const offer = work.em.create(SupplierOffer, {
     ...{ leatherId, hardwareId, supplierId, multiple },
     ...{ articleNumber: '', leadDays: null, minimum: null, preferred: true },
     breaks: [{ from, price: price.toFixed() }],
   });
   await work.em.flush();
-  return present;
+  return offer;
 }

@@ -10,7 +10,7 @@ import { Hardware } from '../hardware/hardware.entity.ts';
 import { KitPart } from '../hardware/kit-part.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
-import { keepPresentOffer, presentSupplier } from './present-offer.ts';
+import { keepPresentOffer, presentOf } from './present-offer.ts';
 import { SupplierOffer } from './supplier-offer.entity.ts';
 
 /** @throws {Problem} 404 */
@@ -31,14 +31,14 @@ export async function addOffer(
   const { leatherId, hardwareId, supplierId } = typed;
   const { minimum, multiple, preferred, ...plain } = typed;
   await requireThing(work, typed);
-  await requireSupplier(work, supplierId, { leatherId, hardwareId });
   const thing = { leatherId, hardwareId };
+  await requireSupplier(work, supplierId, thing);
   const first = (await work.em.count(SupplierOffer, thing)) === 0;
-  const named = await presentSupplier(work, thing);
-  const bought = named !== null && named !== supplierId;
-  if (first && bought) {
-    const present = await keepPresentOffer(work, thing);
-    if (present !== null) await logOffer(work, present, 'kept what is paid today as the offer for');
+  const present = await presentOf(work, thing);
+  const elsewhere = present.supplierId !== null && present.supplierId !== supplierId;
+  if (first && elsewhere) {
+    const theirs = await keepPresentOffer(work, thing, present);
+    if (theirs !== null) await logOffer(work, theirs, 'kept what is paid today as the offer for');
   }
   const offer = work.em.create(SupplierOffer, {
     ...plain,
@@ -48,7 +48,7 @@ export async function addOffer(
   });
   requireSound(offer);
   await work.em.flush();
-  if (preferred || (first && !bought)) await preferOffer(work, offer);
+  if (preferred || (first && !elsewhere)) await preferOffer(work, offer);
   await logOffer(work, offer, 'entered an offer for');
   return offer;
 }

@@ -72,6 +72,27 @@ describe('offers of suppliers', () => {
     expect(item).toMatchObject({ supplierId, multiple: '25' });
   });
 
+  it('leave whole sides and their price per ft² preferred beside somebody else’s first offer', async () => {
+    const { supplierId } = things;
+    const sides = { wholeForm: 'side', wholeAreaMm2: ft2(22), supplierId };
+    const { body: leather } = await owner()
+      .post('/api/leathers')
+      .send({ name: 'Chestnut 2–3 oz', pricePerFt2: '7.40', ...sides })
+      .expect(201);
+    const asked = { supplierId: second, leatherId: leather.id };
+    await offer({ ...asked, breaks: [{ from: '0', price: '6.9' }] }).expect(201);
+    const list = await owner().get(`/api/supplier-offers?leatherId=${leather.id}`).expect(200);
+    expect(list.body.items).toMatchObject([
+      { supplierId, preferred: true, multiple: null, breaks: [{ from: '0', price: '7.4' }] },
+      { supplierId: second, preferred: false },
+    ]);
+    const { body: due } = await owner().get('/api/order-suggestions?show=all').expect(200);
+    const item = due.items.find(
+      ({ id, of }: { id: number; of: string }) => of === 'leather' && id === leather.id,
+    );
+    expect(item).toMatchObject({ supplierId, multiple: '2043866.88' });
+  });
+
   it('keep an area of leather exactly, and its price per ft²', async () => {
     const { supplierId, leatherId } = things;
     const { body } = await offer({

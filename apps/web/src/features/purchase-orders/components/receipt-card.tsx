@@ -33,7 +33,7 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
       subtitle={`received by ${receipt.byName}`}
       aside={
         isOwner &&
-        receipt.untouched && (
+        receipt.staysBecause === null && (
           <Button onClick={() => setAsking('costs')}>Put right what it cost</Button>
         )
       }

@@ -19,7 +19,7 @@ export function UnclearNotice({ things }: UnclearNoticeProps) {
           <TextLink to={`/stockroom/${of}/${id}`}>{name}</TextLink>
         </Fragment>
       ))}
-      : check its price, pack, minimum and supplier. The program’s log says what went wrong.
+      : check its pack, minimum and supplier. The program’s log says what went wrong.
     </Notice>
   );
 }
