@@ -6,7 +6,8 @@ export function freeWords({ free, reorderAt }: Pick<ShortItem, 'free' | 'reorder
   figure: string;
   rest: string;
 } {
-  const keep = `keep ${countText(reorderAt)}`;
+  // The figure stays beside its word where the line breaks.
+  const keep = `keep\u00a0${countText(reorderAt)}`;
   if (free > 0) return { figure: countText(free), rest: `free, ${keep}` };
   const tooFew = free < 0 ? `, ${countText(-free)} too few` : '';
   return { figure: 'None', rest: `free${tooFew}, ${keep}` };
