@@ -190,6 +190,14 @@ walk('a typed order takes the price that its quantity reaches', async ({ page })
   await page.getByRole('link', { name: 'Change', exact: true }).click();
   await settled(page);
   expect(await price.inputValue(), 'a draft is opened as it was saved').toBe('0.13');
+
+  await many.fill('420');
+  await page.getByRole('button', { name: 'Save' }).click();
+  const remark = `${rings}. Sold in packs of 50: order 400 or 450.`;
+  await page.getByText(remark).waitFor();
+  await page.getByRole('button', { name: 'Send', exact: true }).click();
+  await page.getByRole('dialog').getByText(remark).waitFor();
+  await expectAccessible(page);
 });
 
 walk('the oldest of more than one page of hardware can be named and seen', async ({ page }) => {

@@ -132,6 +132,7 @@ export * from './stock/stock-layers.ts';
 export * from './stock/available-to-promise.ts';
 export * from './stock/supplier-offer.ts';
 export * from './stock/best-buy.ts';
+export * from './stock/ordered-quantity.ts';
 
 export * from './hardware/kit-prices.ts';
 export * from './hardware/count-by-weight.ts';

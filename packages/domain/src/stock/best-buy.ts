@@ -28,10 +28,8 @@ export interface NextBreak extends Buying {
   worth: 'costs less' | 'little more' | 'no';
 }
 
-export interface OfferedBuy {
-  id: number;
-  leadDays: number;
-  preferred: boolean;
+/** The ways to buy a needed quantity on one supplier's terms. */
+export interface Buys {
   /** what is needed, raised to the minimum and to whole packs */
   plain: Buying;
   /** null beyond the last break */
@@ -40,14 +38,23 @@ export interface OfferedBuy {
   best: Buying;
 }
 
-export interface BuyInput {
+export interface OfferedBuy extends Buys {
+  id: number;
+  leadDays: number;
+  preferred: boolean;
+}
+
+export interface NeededInput {
   /** in the unit that is counted: pieces, or mm² of leather; above 0 */
   needed: DecimalText;
   /** how much of it one price is for: 1 piece, or the 92903.04 mm² of a ft² */
   pricedAmount?: DecimalText;
-  offers: readonly BuyOffer[];
   /** what counts as little more, per cent of the plain cost */
   littlePercent?: DecimalText;
+}
+
+export interface BuyInput extends NeededInput {
+  offers: readonly BuyOffer[];
 }
 
 /**
@@ -56,19 +63,11 @@ export interface BuyInput {
  * half up to the cent. At equal cost the preferred supplier comes first, then the quicker one.
  * @throws InvalidInput
  */
-export function bestBuy({
-  needed,
-  pricedAmount = '1',
-  offers,
-  littlePercent = '5',
-}: BuyInput): OfferedBuy[] {
-  const least = readDecimal(needed, 'needed', { min: 0, max: '1000000000000' });
-  const per = readDecimal(pricedAmount, 'pricedAmount', { min: 0 });
-  const little = readDecimal(littlePercent, 'littlePercent', { min: 0, max: 100 });
+export function bestBuy({ offers, ...input }: BuyInput): OfferedBuy[] {
   return offers
     .map((offer) => {
       const { id, leadDays, preferred } = offer;
-      return { id, leadDays, preferred, ...buysOf(checkOffer(offer), least, per, little) };
+      return { id, leadDays, preferred, ...buyOnTerms(offer, input) };
     })
     .sort(byCost);
 }
@@ -79,8 +78,19 @@ const byCost = (a: OfferedBuy, b: OfferedBuy): number =>
   a.leadDays - b.leadDays ||
   a.id - b.id;
 
-function buysOf(offer: CheckedOffer, needed: Decimal, per: Decimal, little: Decimal) {
-  const first = soldQuantity(offer, needed);
+/**
+ * What a needed quantity really costs on one supplier's terms; see `bestBuy`.
+ * @throws InvalidInput
+ */
+export function buyOnTerms(
+  terms: OfferTerms,
+  { needed, pricedAmount = '1', littlePercent = '5' }: NeededInput,
+): Buys {
+  const least = readDecimal(needed, 'needed', { min: 0, max: '1000000000000' });
+  const per = readDecimal(pricedAmount, 'pricedAmount', { min: 0 });
+  const little = readDecimal(littlePercent, 'littlePercent', { min: 0, max: 100 });
+  const offer = checkOffer(terms);
+  const first = soldQuantity(offer, least);
   const plain = buy(offer, first, per);
   // Within one break more always costs more, so that only its beginning can be the cheapest.
   const later = offer.breaks

@@ -1,6 +1,6 @@
 import { type DecimalText, Exact, toAtMost, toText } from '../numbers/decimal-text.ts';
 import { MM2_PER_FT2 } from '../units/measures.ts';
-import { bestBuy } from './best-buy.ts';
+import { buyOnTerms } from './best-buy.ts';
 import type { LeatherStock } from './check-stock.ts';
 import type { OfferTerms } from './supplier-offer.ts';
 
@@ -20,7 +20,7 @@ export interface LeatherToBuy extends ToBuy {
 
 /**
  * What to buy of a thing as its supplier sells it: at least the minimum, in full packs, and on to a price break that
- * costs less in total (`bestBuy`).
+ * costs less in total (`buyOnTerms`).
  * @param needed above 0
  * @param pricedAmount how much of it one price is for
  * @throws InvalidInput
@@ -30,10 +30,7 @@ export function amountToBuy(
   needed: DecimalText,
   pricedAmount: DecimalText = '1',
 ): ToBuy {
-  const offers = [{ ...terms, id: 0, leadDays: 0, preferred: true }];
-  const [buy] = bestBuy({ needed, pricedAmount, offers });
-  if (buy === undefined) throw new Error('One offer is asked, and one is answered');
-  const { plain, next, best } = buy;
+  const { plain, next, best } = buyOnTerms(terms, { needed, pricedAmount });
   const paid = !new Exact(plain.cost).isZero();
   const same = next !== null && paid && new Exact(next.cost).eq(best.cost) ? next.quantity : null;
   return {

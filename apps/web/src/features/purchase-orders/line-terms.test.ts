@@ -58,7 +58,7 @@ describe('what is said under a line', () => {
       99,
       'Sold from 100: order 100.',
     ],
-    ['no whole packs', rivets, 420, 'Sold in packs of 50: order 400 or 450.'],
+    ['no whole packs', rivets, 320, 'Sold in packs of 50: order 300 or 350.'],
     ['less than a pack', { ...loose, multiple: '50' }, 20, 'Sold in packs of 50: order 50.'],
     [
       'a break that costs less',
@@ -83,6 +83,18 @@ describe('what is said under a line', () => {
       loose,
       405,
       'From 500 they cost 0.14 each: 500 cost only 1.15 more than 405.',
+    ],
+    [
+      'no whole packs, and a break that costs less',
+      rivets,
+      420,
+      'Sold in packs of 50: order 400 or 450. From 500 they cost 0.14 each: 500 cost 6.50 less than 450.',
+    ],
+    [
+      'a pack that reaches a break',
+      { ...rivets, multiple: '100' },
+      450,
+      'Sold in packs of 100: order 400 or 500. From 500 they cost 0.14 each: 500 cost only 2.00 more than 400.',
     ],
     ['one that is far', rivets, 200, ''],
     ['the last one', rivets, 600, ''],

@@ -1,5 +1,11 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
-import { bestBuy, MM2_PER_FT2, priceReached, type Buying } from '@hidewright/domain';
+import {
+  judgeQuantity,
+  MM2_PER_FT2,
+  priceReached,
+  type Buying,
+  type OrderedQuantity,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { areaText, countText, moneyText, unitPriceText } from '../../lib/formatting.ts';
 import { isFigure } from '../../lib/units.ts';
@@ -43,43 +49,44 @@ export function priceToFill({ typed, before, offered }: PriceField): string | un
   return ours && !sameFigure(typed, offered) ? offered : undefined;
 }
 
-/** One sentence under a line: what is not sold like that, or where more costs less or little more. */
+/** What is said of a line: what is not sold like that, and where more costs less or little more. */
 export function termsText(terms: LineTerms, typed: unknown, price: string, habit: Habit): string {
   const quantity = quantityIn(typed);
   if (quantity === undefined) return '';
-  const [buy] = bestBuy({
-    needed: quantity,
-    pricedAmount: terms.unit === 'mm2' ? MM2_PER_FT2 : '1',
-    offers: [{ ...terms, id: 0, leadDays: 0, preferred: true }],
-  });
-  if (buy === undefined) return '';
-  const { plain, next, best } = buy;
-  if (!new Decimal(plain.quantity).eq(quantity)) {
-    return soldText(terms, quantity, plain.quantity, habit);
-  }
+  const pricedAmount = terms.unit === 'mm2' ? MM2_PER_FT2 : '1';
+  const { instead, nextBreak } = judgeQuantity(terms, quantity, pricedAmount);
   // Whoever has a price of their own is not told what the listed ones come to.
-  const listed = price.trim() === '' || sameFigure(price, plain.price);
-  if (!listed || Number(plain.cost) === 0) return '';
-  if (best.quantity !== plain.quantity) return moreText(terms, plain, best, habit);
-  return next === null || next.worth === 'no' ? '' : moreText(terms, plain, next, habit);
+  const listed = price.trim() === '' || sameFigure(price, priceReached(terms, quantity));
+  return [
+    instead && soldText(terms, instead, habit),
+    listed && nextBreak && moreText(terms, nextBreak, habit),
+  ]
+    .filter(Boolean)
+    .join(' ');
 }
 
 /** Sold in packs of 50: order 400 or 450. */
-function soldText(terms: LineTerms, typed: string, raised: string, habit: Habit): string {
+function soldText(
+  terms: LineTerms,
+  { less, more, belowMinimum }: NonNullable<OrderedQuantity['instead']>,
+  habit: Habit,
+): string {
   const { minimum, multiple } = terms;
   const say = sayIn(terms, habit);
-  const tooLittle = minimum !== null && new Decimal(typed).lt(minimum);
   const sold = [
-    tooLittle && `from ${say(minimum)}`,
+    belowMinimum && minimum !== null && `from ${say(minimum)}`,
     multiple !== null && `in packs of ${say(multiple)}`,
   ];
-  const lower = multiple === null ? null : new Decimal(raised).minus(multiple);
-  const either = lower?.gt(0) && !tooLittle ? `${say(lower.toFixed())} or ` : '';
-  return `Sold ${sold.filter(Boolean).join(' ')}: order ${either}${say(raised)}.`;
+  const either = less === null ? '' : `${say(less)} or `;
+  return `Sold ${sold.filter(Boolean).join(' ')}: order ${either}${say(more)}.`;
 }
 
 /** From 500 they cost 0.14 each: 500 cost 6.50 less than 450. */
-function moreText(terms: LineTerms, plain: Buying, more: Buying, habit: Habit): string {
+function moreText(
+  terms: LineTerms,
+  { plain, more }: NonNullable<OrderedQuantity['nextBreak']>,
+  habit: Habit,
+): string {
   const say = sayIn(terms, habit);
   const price = unitPriceText(more.price);
   const each = terms.unit === 'mm2' ? `it costs ${price} per ft²` : `they cost ${price} each`;

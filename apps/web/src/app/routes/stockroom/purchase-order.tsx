@@ -7,6 +7,7 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import { ClaimsCard } from '../../../features/purchase-orders/components/claims-card.tsx';
 import { OrderActions } from '../../../features/purchase-orders/components/order-actions.tsx';
+import { OrderRemarksNotice } from '../../../features/purchase-orders/components/order-remarks-notice.tsx';
 import { PurchaseLinesTable } from '../../../features/purchase-orders/components/purchase-lines-table.tsx';
 import { PurchaseOrderTicket } from '../../../features/purchase-orders/components/purchase-order-ticket.tsx';
 import { ReceiptCard } from '../../../features/purchase-orders/components/receipt-card.tsx';
@@ -54,6 +55,7 @@ export function Component() {
           )
         }
       >
+        {isOwner && order.state === 'draft' && <OrderRemarksNotice order={order} />}
         <PurchaseLinesTable order={order} isOwner={isOwner} />
       </Card>
       {order.note !== '' && (

@@ -7,6 +7,7 @@ import { dayText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useSendPurchaseOrder } from '../purchase-orders.mutations.ts';
 import { lotsOf } from '../service-words.ts';
+import { OrderRemarksNotice } from './order-remarks-notice.tsx';
 
 interface SendOrderDialogProps {
   order: PurchaseOrder;
@@ -36,6 +37,7 @@ export function SendOrderDialog({ order, open, onOpenChange }: SendOrderDialogPr
       title={`Send ${order.number} to ${order.supplierName}`}
       description={`${lots === '' ? '' : `${lots} goes off the rack with it. `}${awaitedWords(order, today)}Once it is sent it cannot be changed; until something has come it can be cancelled.`}
     >
+      <OrderRemarksNotice order={order} />
       <Form
         schema={sendPurchaseOrder.body}
         defaults={{ by: supplierEmail === '' ? 'hand' : 'mail' }}
