@@ -121,12 +121,16 @@ export const purchaseLine = z
     hardwareId: id.nullable(),
     /** Of a service, the work and the lot: Dyeing of T-0012, Oak tan natural. */
     name: z.string(),
+    /** What the supplier calls it; empty where nobody said, and for a service. */
+    articleNumber: z.string(),
     /** What one of it is; null where it is leather. */
     unit: z.enum(hardwareUnits).nullable(),
     service: service.nullable(),
     /** Of leather: what was ordered and what came. */
     areaMm2: z.string().nullable(),
     receivedAreaMm2: z.string().nullable(),
+    /** Of leather that comes out even in what it is bought as: so many sides. */
+    whole: z.object({ count: z.int(), form: z.string() }).nullable(),
     /** Of hardware: what was ordered and what came. */
     quantity: z.int().nullable(),
     received: z.int().nullable(),

@@ -9,7 +9,7 @@ export {
   toText,
 } from './numbers/decimal-text.ts';
 export type { DecimalText, Limits } from './numbers/decimal-text.ts';
-export { countWords } from './numbers/count-words.ts';
+export { countWords, figureWords } from './numbers/count-words.ts';
 export { normalLoss, normalQuantile } from './numbers/normal.ts';
 
 export * from './units/measures.ts';
@@ -111,6 +111,7 @@ export * from './stock/check-words.ts';
 export * from './stock/coming-weeks.ts';
 export * from './stock/coming-stock.ts';
 export * from './stock/what-to-buy.ts';
+export * from './stock/wholes.ts';
 export { usableOf } from './stock/pieces-from-lot.ts';
 export type { CutFrom } from './stock/pieces-from-lot.ts';
 export type { Dated, PromisePool } from './stock/promise-pool.ts';

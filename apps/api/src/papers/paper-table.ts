@@ -12,7 +12,7 @@ type Cells<Name extends string> = Record<Name, string>;
 
 /**
  * Rows under their heads, on as many pages as they take, the heads again on each. What a row is about stands in the
- * first column and may run over several lines; figures stand to the right.
+ * first column, figures stand to the right; each may run over several lines.
  * @returns where the last row ends, from the top of the page
  */
 export function drawTable<Name extends string>(
@@ -21,18 +21,26 @@ export function drawTable<Name extends string>(
   rows: readonly Cells<Name>[],
   top: number,
 ): number {
-  const [first] = columns;
   let y = drawHeads(paper, columns, top);
   for (const row of rows) {
-    paper.font('plain').fontSize(10);
-    const about = first === undefined ? '' : row[first.name];
-    if (y + paper.heightOfString(about, { width: first?.width ?? 0 }) > sheet.bottom) {
+    if (y + rowHeight(paper, columns, row) > sheet.bottom) {
       paper.addPage();
       y = drawHeads(paper, columns, sheet.top);
     }
     y = drawRow(paper, columns, row, { y, colour: ink }) + 6;
   }
   return y;
+}
+
+function rowHeight<Name extends string>(
+  paper: Paper,
+  columns: readonly PaperColumn<Name>[],
+  cells: Cells<Name>,
+): number {
+  paper.font('plain').fontSize(10);
+  return Math.max(
+    ...columns.map(({ name, width }) => paper.heightOfString(cells[name], { width })),
+  );
 }
 
 function drawHeads<Name extends string>(

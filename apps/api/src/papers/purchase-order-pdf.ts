@@ -25,7 +25,9 @@ export interface PurchaseOrderPaper {
   digits: number;
   lines: {
     name: string;
-    /** With its unit: "40 ft²", "1,000". */
+    /** What the supplier calls it; empty where nobody said. */
+    articleNumber: string;
+    /** With its unit: "40 ft²", "1,000"; "5 sides, about 110 ft²". */
     quantity: string;
     unitPrice: string;
     /** "per ft²", "each" or "for the lot" */
@@ -125,7 +127,9 @@ function drawCode(paper: Paper, { number }: PurchaseOrderPaper): number {
 
 function cellsOf(line: PurchaseOrderPaper['lines'][number], digits: number): Cells {
   return {
-    what: line.name,
+    what: [line.name, line.articleNumber && `your article ${line.articleNumber}`]
+      .filter(Boolean)
+      .join('\n'),
     quantity: line.quantity,
     price: `${printedNumber(line.unitPrice, digits)} ${line.per}`,
     amount: printedNumber(line.amount, digits),

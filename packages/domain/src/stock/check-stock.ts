@@ -6,6 +6,7 @@ import type { HeldWork } from '../promise/held-work.ts';
 import type { CutFrom, LotToCut } from './pieces-from-lot.ts';
 import type { PromisePool } from './promise-pool.ts';
 import type { OfferTerms } from './supplier-offer.ts';
+import type { Whole } from './wholes.ts';
 
 /** Where more of an item comes from. */
 export interface Sourcing {
@@ -63,7 +64,7 @@ export interface LeatherStock {
   /** what comes; nothing is free in it, for that lies in the lots */
   pool: PromisePool;
   /** what it is bought as, whole; null where nobody said */
-  whole: { form: string; areaMm2: DecimalText } | null;
+  whole: Whole | null;
   /** the share of what is bought that can be cut */
   usablePercent: DecimalText;
   buying: Sourcing;

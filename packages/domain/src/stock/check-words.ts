@@ -9,6 +9,7 @@ import type { HoursFacts } from './check-runs.ts';
 import type { Sourcing } from './check-stock.ts';
 import type { ToolFacts } from './check-tools.ts';
 import { amountToBuy, leatherToBuy, packsOf, type ToBuy } from './what-to-buy.ts';
+import { wholes } from './wholes.ts';
 
 /** How the shop says areas and days. */
 export interface Say {
@@ -122,12 +123,6 @@ function buyLeatherWords(leather: LeatherFacts['leather'], missing: number, say:
       : `${toBuy.whole.count} more ${wholes(toBuy.whole)}`;
   const here = (toBuy.whole?.count ?? 1) > 1 ? 'them if they are' : 'it if it is';
   return `Buy ${amount}${breakWords(toBuy)}, or receive ${here} here.`;
-}
-
-/** "side", "hides", "bellies". */
-export function wholes({ count, form }: { count: number; form: string }): string {
-  if (count === 1) return form;
-  return form.endsWith('y') ? `${form.slice(0, -1)}ies` : `${form}s`;
 }
 
 function shadeWords({ shades, likeShade, takes }: LeatherFacts): string[] {

@@ -3,6 +3,7 @@ import { MM2_PER_FT2 } from '../units/measures.ts';
 import { buyOnTerms } from './best-buy.ts';
 import type { LeatherStock } from './check-stock.ts';
 import type { OfferTerms } from './supplier-offer.ts';
+import { type Wholes, wholesOf } from './wholes.ts';
 
 /** What is bought of a thing so that enough of it comes; quantities in pieces, or in mm². */
 export interface ToBuy {
@@ -15,7 +16,7 @@ export interface ToBuy {
 
 export interface LeatherToBuy extends ToBuy {
   /** whole sides or hides, where it is known what it is bought as and they come out even */
-  whole: { count: number; form: string } | null;
+  whole: Wholes | null;
 }
 
 /**
@@ -52,15 +53,7 @@ export function leatherToBuy(
   const gross = new Exact(usable).div(1000).times(100).div(usablePercent);
   const needed = toAtMost(gross.toDecimalPlaces(3, Exact.ROUND_UP), 3);
   const toBuy = amountToBuy(buying.terms, needed, MM2_PER_FT2);
-  return { ...toBuy, whole: whole === null ? null : wholesOf(whole, toBuy.quantity) };
-}
-
-function wholesOf(
-  { areaMm2, form }: NonNullable<LeatherStock['whole']>,
-  quantity: DecimalText,
-): LeatherToBuy['whole'] {
-  if (!new Exact(quantity).mod(areaMm2).isZero()) return null;
-  return { count: new Exact(quantity).div(areaMm2).toNumber(), form };
+  return { ...toBuy, whole: wholesOf(whole, toBuy.quantity) };
 }
 
 /** How many full packs that is; null where any number is sold. */

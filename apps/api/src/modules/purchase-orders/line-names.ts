@@ -1,5 +1,7 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
 import type { PurchasedService } from '@hidewright/contract';
+import { type Wholes, wholesOf } from '@hidewright/domain';
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
 import { Lot } from '../lots/lot.entity.ts';
@@ -58,6 +60,16 @@ export function serviceOf(
     changes: line.leatherId !== lot.leatherId,
     state: stateOf(line, order),
   };
+}
+
+/** How many whole sides or hides are ordered, where they come out even; what goes out to be worked on is of one lot. */
+export function wholeOf(
+  { service, leatherId, quantity }: PurchaseLine,
+  { leathers }: LineNames,
+): Wholes | null {
+  const { wholeForm: form = null, wholeAreaMm2 = null } = leathers.get(leatherId ?? 0) ?? {};
+  if (service !== null || form === null || wholeAreaMm2 === null) return null;
+  return wholesOf({ form, areaMm2: wholeAreaMm2.toFixed() }, unscaled(quantity, 3).toFixed());
 }
 
 function stateOf({ received, closed }: PurchaseLine, order: PurchaseOrder) {

@@ -1,7 +1,9 @@
-import { countedWords, unitWord } from '@hidewright/domain';
+import { countedWords, figureWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
+import { sayDay } from '../quotes/say-day.ts';
 import { sayArea } from '../stock/say-area.ts';
+import { sayOrderedArea } from './ordered-area.ts';
 
 interface Sender {
   name: string;
@@ -19,10 +21,10 @@ export function purchaseOrderLetter(
     'Good day,',
     asking(order),
     order.lines.map((line) => sayLine(line, from)).join('\n'),
-    `Together ${from.currency} ${order.total ?? ''}, before carriage and tax.`,
+    `Together ${from.currency} ${figureWords(order.total ?? '')}, before carriage and tax.`,
     order.expectedOn === null
       ? ''
-      : `We count on it by ${order.expectedOn}. Please tell us if it will be later.`,
+      : `We count on it by ${sayDay(order.expectedOn)}. Please tell us if it will be later.`,
     order.note,
     'The order is attached. Please put its sheet, or its number, in with the goods.',
     from.address.startsWith(from.name)
@@ -47,16 +49,20 @@ function sayLine(line: PurchaseLine, { areaUnit, currency }: Sender): string {
   const price = `${currency} ${line.unitPrice ?? ''}`;
   if (line.service !== null) return sayWork(line, line.service, { areaUnit, currency });
   if (line.areaMm2 === null) return sayCounted(line, price);
-  return `- ${sayArea(new Decimal(line.areaMm2), areaUnit)} of ${line.name}, at ${price} per ft²`;
+  return `- ${sayOrderedArea(line, areaUnit)} of ${nameAndArticle(line)}, at ${price} per ft²`;
 }
 
-/** - 500 × Rivets 7 mm, at USD 0.11 each; - 250 ml of Edge dye, at USD 0.04 per ml */
-function sayCounted({ name, quantity, unit }: PurchaseLine, price: string): string {
-  const count = quantity ?? 0;
-  return unit === null || unit === 'piece'
-    ? `- ${count} × ${name}, at ${price} each`
-    : `- ${countedWords(count, unit)} of ${name}, at ${price} per ${unitWord(unit)}`;
+/** - 1,500 × Rivets 7 mm, at USD 0.11 each; - 250 ml of Edge dye, at USD 0.04 per ml */
+function sayCounted(line: PurchaseLine, price: string): string {
+  const [count, unit] = [line.quantity ?? 0, line.unit ?? 'piece'];
+  const counted = countedWords(count, unit);
+  return unit === 'piece'
+    ? `- ${counted} × ${nameAndArticle(line)}, at ${price} each`
+    : `- ${counted} of ${nameAndArticle(line)}, at ${price} per ${unitWord(unit)}`;
 }
+
+const nameAndArticle = ({ name, articleNumber }: PurchaseLine): string =>
+  articleNumber === '' ? name : `${name}, your article ${articleNumber}`;
 
 /** - Dyeing of T-0012, Oak tan natural 7–8 oz, 24.8 ft², to become Oak tan black 7–8 oz, at USD 1.50 per ft² */
 function sayWork(

@@ -1,11 +1,10 @@
 import { countedWords, minorDigits, unitWord } from '@hidewright/domain';
-import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine } from '@hidewright/contract';
 import { dayIn } from '../../day-in.ts';
 import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
 import type { Work } from '../../work.ts';
-import { sayArea } from '../stock/say-area.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
+import { sayOrderedArea } from './ordered-area.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
 import { readOnePurchaseOrder } from './read-purchase-orders.ts';
 
@@ -33,13 +32,22 @@ function printedLine(
   line: PurchaseLine,
   areaUnit: Workshop['areaUnit'],
 ): PurchaseOrderPaper['lines'][number] {
-  const { name, areaMm2, quantity, unit, unitPrice = '0.00', amount = '0.00' } = line;
+  const {
+    name,
+    articleNumber,
+    areaMm2,
+    quantity,
+    unit,
+    unitPrice = '0.00',
+    amount = '0.00',
+  } = line;
   return {
     name,
+    articleNumber,
     quantity:
       areaMm2 === null
         ? countedWords(quantity ?? 0, unit ?? 'piece')
-        : sayArea(new Decimal(areaMm2), areaUnit),
+        : sayOrderedArea(line, areaUnit),
     unitPrice,
     per: areaMm2 === null ? perWord(unit) : 'per ft²',
     amount,

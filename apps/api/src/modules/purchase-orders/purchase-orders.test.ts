@@ -1,7 +1,10 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { ft2, orderMore, stockUp } from '../../testing/stockroom.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
+import { reading, theProgram } from '../../work.ts';
 import { OutgoingMail } from '../mail/outgoing-mail.entity.ts';
+import { findPurchaseOrder } from './draft-purchase-order.ts';
+import { paperOf } from './purchase-order-paper.ts';
 
 let shop: Awaited<ReturnType<typeof startTestShop>>;
 let things: Awaited<ReturnType<typeof stockUp>>;
@@ -123,7 +126,50 @@ describe('an order to a supplier', () => {
     expect(mail.recipient).toBe('orders@example.com');
     expect(mail.subject).toContain(order.number);
     expect(mail.body).toMatch(/40 ft² of Oak tan russet \d+, at USD 8\.50 per ft²/);
-    expect(mail.body).toMatch(/1000 × Copper rivet \d+, at USD 0\.1625 each/);
+    expect(mail.body).toMatch(/1,000 × Copper rivet \d+, at USD 0\.1625 each/);
+  });
+
+  it('names the supplier’s own article, and how many whole sides the leather is', async () => {
+    const leather = await owner()
+      .post('/api/leathers')
+      .send({
+        ...{ name: `By the side ${things.supplierId}`, pricePerFt2: '9.00' },
+        ...{ wholeForm: 'side', wholeAreaMm2: ft2(20) },
+      })
+      .expect(201);
+    const offer = (of: object, supplierId: number, articleNumber: string) =>
+      owner()
+        .post('/api/supplier-offers')
+        .send({ ...of, supplierId, articleNumber, breaks: [{ from: '1', price: '0.2' }] })
+        .expect(201);
+    const other = await stockUp(shop);
+    const rivets = { hardwareId: things.hardwareId };
+    await offer(rivets, things.supplierId, 'CR 7/1');
+    await offer(rivets, other.supplierId, '99');
+    await offer({ leatherId: things.leatherId }, things.supplierId, 'OT-7');
+
+    const bySide = { leatherId: leather.body.id as number };
+    const order = await draft([
+      line(),
+      hides(),
+      hides(bySide),
+      hides({ ...bySide, areaMm2: ft2(50) }),
+    ]);
+    expect(order.lines).toMatchObject([
+      { articleNumber: 'CR 7/1', whole: null },
+      { articleNumber: 'OT-7', whole: null },
+      { articleNumber: '', whole: { count: 2, form: 'side' } },
+      { articleNumber: '', whole: null },
+    ]);
+    const printed = await reading(shop.context, theProgram, async (work) =>
+      paperOf(work, await findPurchaseOrder(work, order.id)),
+    );
+    expect(printed.lines).toMatchObject([
+      { articleNumber: 'CR 7/1', quantity: '1,000' },
+      { articleNumber: 'OT-7', quantity: '40 ft²' },
+      { articleNumber: '', quantity: '2 sides, about 40 ft²' },
+      { articleNumber: '', quantity: '50 ft²' },
+    ]);
   });
 
   it('has its paper with it, and the file that was sent stays as it was', async () => {

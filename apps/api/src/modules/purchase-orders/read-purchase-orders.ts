@@ -7,9 +7,10 @@ import { notFound } from '../../http/problem.ts';
 import type { Work } from '../../work.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { lineProgress } from '@hidewright/domain';
+import { readArticleNumbers, type ArticleNumberOf } from './article-numbers.ts';
 import { readDraftArrivals } from './draft-arrivals.ts';
 import { lineAmount } from './line-amount.ts';
-import { nameOf, readLineNames, serviceOf, type LineNames } from './line-names.ts';
+import { nameOf, readLineNames, serviceOf, wholeOf, type LineNames } from './line-names.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { paidOf, readPaid, type Paid } from './paid-for-lines.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
@@ -28,12 +29,18 @@ export async function readPurchaseOrderList(
     { orderBy: { position: 'asc' } },
   );
   const names = await readLineNames(em, lines);
+  const articleNumberOf = await readArticleNumbers(em, orders, lines);
   const paid = await readPaid(em, lines);
   const arrivals = await readDraftArrivals(work, orders);
   const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
   return orders.map((order) => {
     const own = lines.filter((line) => line.purchaseOrderId === order.id);
-    return toReply(order, suppliers.get(order.supplierId), own, { names, paid, arrivals });
+    return toReply(order, suppliers.get(order.supplierId), own, {
+      names,
+      articleNumberOf,
+      paid,
+      arrivals,
+    });
   });
 }
 
@@ -53,6 +60,7 @@ async function byId<T extends { id: number }>(rows: Promise<T[]>): Promise<Map<n
 
 interface Known {
   names: LineNames;
+  articleNumberOf: ArticleNumberOf;
   paid: Paid;
   arrivals: ReadonlyMap<number, string>;
 }
@@ -83,7 +91,8 @@ function toReply(
   };
 }
 
-function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known): LineReply {
+function toLine(line: PurchaseLine, order: PurchaseOrder, known: Known): LineReply {
+  const { names, paid } = known;
   const ofLeather = line.leatherId !== null;
   const area = (thousandths: number) => (ofLeather ? unscaled(thousandths, 3).toFixed() : null);
   const pieces = (quantity: number) => (ofLeather ? null : quantity);
@@ -94,10 +103,12 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
     position: line.position,
     ...whatOf(line),
     name: nameOf(line, names),
+    articleNumber: known.articleNumberOf(order.supplierId, line),
     unit: names.hardware.get(line.hardwareId ?? 0)?.unit ?? null,
     service: serviceOf(line, order, names),
     areaMm2: area(line.quantity),
     receivedAreaMm2: area(line.received),
+    whole: wholeOf(line, names),
     quantity: pieces(line.quantity),
     received: pieces(line.received),
     toCome: goods(toCome),

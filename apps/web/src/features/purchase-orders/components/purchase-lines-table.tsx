@@ -1,10 +1,11 @@
 import type { PurchaseLine, PurchaseOrder } from '@hidewright/contract';
+import { wholes } from '@hidewright/domain';
 import { useMemo, useState } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { goodsText } from '../goods-text.ts';
@@ -20,18 +21,36 @@ const placeOf = ({ service, leatherId, hardwareId }: PurchaseLine) => {
     : `/stockroom/leather/${leatherId}`;
 };
 
-/** What is ordered; of work on a lot, also what it becomes. */
+/** What is ordered, with its supplier's own number for it; of work on a lot, also what it becomes. */
 function NameOf({ line }: { line: PurchaseLine }) {
-  const { service } = line;
+  const { service, articleNumber } = line;
   return (
     <span className="block text-left">
       <TextLink to={placeOf(line)}>{line.name}</TextLink>
+      {articleNumber !== '' && (
+        <span className="block text-sm font-normal text-ink-soft">article {articleNumber}</span>
+      )}
       {service?.changes && (
         <span className="block text-sm font-normal text-ink-soft">
           becomes {service.becomesName}
         </span>
       )}
     </span>
+  );
+}
+
+/** An area with the sides that it is, where they come out even. */
+function OrderedOf({ line }: { line: PurchaseLine }) {
+  const { whole, unit } = line;
+  return (
+    <>
+      {goodsText(line, useWorkshop(), unit)}
+      {whole !== null && (
+        <span className="block text-sm text-ink-soft">
+          {countText(whole.count)} {wholes(whole)}
+        </span>
+      )}
+    </>
   );
 }
 
@@ -150,7 +169,7 @@ function columnsFor(
       id: 'ordered',
       header: 'Ordered',
       value: (row) => row.areaMm2 ?? row.quantity,
-      cell: (row) => goodsText(row, workshop, row.unit),
+      cell: (row) => <OrderedOf line={row} />,
       align: 'right',
     },
     ...(order.state === 'draft' ? [] : arrivalColumns(workshop, order, acts)),
