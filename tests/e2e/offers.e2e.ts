@@ -78,6 +78,9 @@ walk(
     await settled(page);
     await expectAccessible(page);
     await expectNoOverflow(page);
+    await page.getByRole('link', { name: 'Order it' }).click();
+    const supplier = page.getByLabel('Supplier', { exact: true });
+    expect(await supplier.locator('option:checked').textContent()).toBe('Straightedge Dies');
   },
 );
 

@@ -19,6 +19,20 @@ export interface OfferTerms {
   breaks: readonly OfferBreak[];
 }
 
+/**
+ * By which of its offers a thing is bought: the preferred, or else that of the supplier whom the thing names, or the
+ * first where it names nobody.
+ */
+export function usualOffer<Offer extends { preferred: boolean; supplierId: number }>(
+  offers: readonly Offer[],
+  supplierId: number | null,
+): Offer | undefined {
+  return (
+    offers.find(({ preferred }) => preferred) ??
+    (supplierId === null ? offers[0] : offers.find((offer) => offer.supplierId === supplierId))
+  );
+}
+
 export interface OfferFault {
   /** 'breaks.1.from' or 'minimum' */
   field: string;

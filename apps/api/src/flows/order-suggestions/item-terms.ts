@@ -1,5 +1,5 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
-import { Exact, type OfferTerms } from '@hidewright/domain';
+import { Exact, type OfferTerms, usualOffer } from '@hidewright/domain';
 import type { Supplier } from '../../modules/suppliers/supplier.entity.ts';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { ItemRow } from './ordered-items.ts';
@@ -18,18 +18,14 @@ export interface ItemTerms {
 }
 
 /**
- * The offer that is preferred, or else the one of the supplier that the thing names, or the first where it names none;
- * without an offer the thing's own price and pack, and whole sides where that is how a leather is bought.
+ * By its usual offer; without one, the thing's own price and pack, and whole sides where that is how a leather is bought.
  */
 export function itemTerms(
   row: BoughtRow,
   offers: readonly SupplierOfferReply[],
   suppliers: ReadonlyMap<number, Supplier>,
 ): ItemTerms {
-  const offer =
-    offers.find(({ preferred }) => preferred) ??
-    offers.find(({ supplierId }) => supplierId === row.supplier_id) ??
-    (row.supplier_id === null ? offers[0] : undefined);
+  const offer = usualOffer(offers, row.supplier_id);
   const supplier = suppliers.get(offer?.supplierId ?? row.supplier_id ?? 0) ?? null;
   const leadDays = offer?.usualLeadDays ?? supplier?.leadDays ?? 0;
   return { supplier, leadDays, terms: offer === undefined ? ownTerms(row) : offered(row, offer) };

@@ -1,4 +1,9 @@
-import { useNavigate, useSearchParams } from 'react-router-dom';
+import {
+  useLoaderData,
+  useNavigate,
+  useSearchParams,
+  type LoaderFunctionArgs,
+} from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
 import { PageHeader } from '../../../components/page-header.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
@@ -13,15 +18,29 @@ import {
   type TypedOrder,
 } from '../../../features/purchase-orders/typed-order.ts';
 import { loadOrderBasics, NoSupplier, useOrderBasics } from './order-basics.tsx';
+import { readUsualSupplier } from './usual-supplier.ts';
 
-export async function loader() {
-  await loadOrderBasics();
+export async function loader({ request }: LoaderFunctionArgs) {
+  const [supplierId] = await Promise.all([
+    supplierFor(new URL(request.url).searchParams),
+    loadOrderBasics(),
+  ]);
+  return { supplierId };
+}
+
+/** The one that the order was begun from, or who usually sells what it was begun from. */
+async function supplierFor(search: URLSearchParams): Promise<number | null> {
+  const named = (name: string) => Number(search.get(name));
+  if (named('supplier') > 0) return named('supplier');
+  if (named('leather') > 0) return readUsualSupplier({ leatherId: named('leather') });
+  if (named('hardware') > 0) return readUsualSupplier({ hardwareId: named('hardware') });
   return null;
 }
 
 export function Component() {
   const navigate = useNavigate();
   const [search] = useSearchParams();
+  const { supplierId } = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const add = useAddPurchaseOrder();
   const basics = useOrderBasics();
   return (
@@ -33,7 +52,7 @@ export function Component() {
         <Card>
           <PurchaseOrderForm
             {...basics}
-            defaults={startWith(search, basics)}
+            defaults={startWith(search, supplierId, basics)}
             draftKey={`purchase-order-new-${search}`}
             submitWord="Save the draft"
             cancelTo="/stockroom/purchase-orders"
@@ -52,14 +71,15 @@ export function Component() {
 /** An order that was begun from a leather, hardware, a lot or a supplier has it in it. */
 function startWith(
   search: URLSearchParams,
+  supplierId: number | null,
   { leathers, hardware }: { leathers: Goods[]; hardware: Goods[] },
 ): Partial<TypedOrder> {
   const named = (goods: Goods[], name: string) =>
     goods.filter(({ id }) => String(id) === search.get(name));
-  const [supplierId, lotId] = [Number(search.get('supplier')), Number(search.get('lot'))];
+  const lotId = Number(search.get('lot'));
   return {
     ...blankOrder,
-    ...(supplierId > 0 && { supplierId }),
+    ...(supplierId !== null && { supplierId }),
     lines: [
       ...named(leathers, 'leather').map((goods) => blankLine('leather', goods)),
       ...named(hardware, 'hardware').map((goods) => blankLine('hardware', goods)),
