@@ -177,6 +177,10 @@ walk('a typed order takes the price that its quantity reaches', async ({ page })
   await page.setViewportSize(phone);
   await settled(page);
   await expectNoOverflow(page);
+  await many.fill('-5');
+  await price.focus();
+  await page.getByText('Enter 1 or more.').waitFor();
+  await page.getByText('There is a sum when every figure is right.').waitFor();
   await many.fill('500');
   await expect.poll(() => price.inputValue()).toBe('0.14');
   await page.getByText(/Together USD 70.00/).waitFor();

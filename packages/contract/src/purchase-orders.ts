@@ -60,7 +60,7 @@ const typedService = z
   });
 export type ServiceLineTyped = z.output<typeof typedService>;
 
-const typedLine = z.discriminatedUnion(
+export const typedPurchaseLine = z.discriminatedUnion(
   'of',
   [
     z.strictObject({
@@ -79,7 +79,7 @@ const typedLine = z.discriminatedUnion(
   ],
   'Choose a leather, hardware, or a service.',
 );
-export type PurchaseLineTyped = z.output<typeof typedLine>;
+export type PurchaseLineTyped = z.output<typeof typedPurchaseLine>;
 /** What is bought, not worked on. */
 export type GoodsLineTyped = Exclude<PurchaseLineTyped, { of: 'service' }>;
 
@@ -88,7 +88,7 @@ const typed = {
   expectedOn: day.nullable(),
   note: paragraph(2000),
   lines: z
-    .array(typedLine)
+    .array(typedPurchaseLine)
     .min(1, 'Add a line: what do you order?')
     .max(100, 'An order holds at most 100 lines. Make a second one.'),
 };

@@ -84,7 +84,8 @@ export function Form<Schema extends BodySchema>(props: FormProps<Schema>) {
     message,
   }));
   const stale = problem?.status === 412;
-  const failed = listed.length > 0 || (problem !== undefined && !stale);
+  // What is said of a field that was just left has no need of a summary yet.
+  const failed = (submitCount > 0 && listed.length > 0) || (problem !== undefined && !stale);
   return (
     <FormProvider {...form}>
       <FormIdContext value={id}>

@@ -11,10 +11,28 @@ describe('an order as it is typed', () => {
     expect(amountOf(lines)).toBe('372.88');
   });
 
-  it('leaves out what makes no sense yet', () => {
-    expect(
-      amountOf([blankLine('leather'), { of: 'hardware', quantity: 10, unitPrice: 'ten' }]),
-    ).toBe('0.00');
+  it('leaves out what is still open', () => {
+    expect(amountOf([blankLine('leather'), { of: 'hardware', quantity: 10, unitPrice: '' }])).toBe(
+      '0.00',
+    );
+  });
+
+  it.each<[string, object]>([
+    ['a quantity below 1', { quantity: -5 }],
+    ['a quantity that is no number', { quantity: 'abc' }],
+    ['parts of a piece', { quantity: '2.5' }],
+    ['a price that is no number', { unitPrice: 'ten' }],
+    ['a price below 0', { unitPrice: '-1' }],
+  ])('comes to nothing with %s on a line', (_what, wrong) => {
+    const line = { of: 'hardware', hardwareId: 2, quantity: 10, unitPrice: '0.17' } as const;
+    const leather = {
+      of: 'leather',
+      leatherId: 1,
+      areaMm2: '929030.4',
+      unitPrice: '8.50',
+    } as const;
+    expect(amountOf([leather, line])).toBe('86.70');
+    expect(amountOf([leather, { ...line, ...wrong } as typeof line])).toBeUndefined();
   });
 
   it('begins with a pack of what was chosen, and its price still open', () => {

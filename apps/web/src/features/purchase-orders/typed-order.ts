@@ -1,4 +1,4 @@
-import type { addPurchaseOrder } from '@hidewright/contract';
+import { typedPurchaseLine, type addPurchaseOrder } from '@hidewright/contract';
 import type { Lot, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { mm2ToFootage, round, type HardwareUnit } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
@@ -74,13 +74,28 @@ function typedServiceOf(
   };
 }
 
-/** What the lines that are filled in come to; of a lot without an area, all that is free goes out. */
+/**
+ * What the lines that are filled in come to; of a lot without an area, all that is free goes out. Undefined while a
+ * figure on one of them is wrong.
+ */
 export function amountOf(
   lines: readonly Partial<TypedLine>[],
   lots: readonly FreeLot[] = [],
-): string {
+): string | undefined {
+  if (lines.some(hasWrongFigure)) return undefined;
   return Decimal.sum(0, ...lines.map((line) => lineAmount(line, lots))).toFixed(2);
 }
+
+const figures: readonly unknown[] = ['areaMm2', 'quantity', 'unitPrice', 'fixedPrice'];
+
+/** Whether a figure is typed that cannot be sent like that; what is still open is not wrong. */
+function hasWrongFigure(line: Partial<TypedLine>): boolean {
+  const issues = typedPurchaseLine.safeParse(line).error?.issues ?? [];
+  return issues.some(({ path: [field] }) => figures.includes(field) && isTyped(line, field));
+}
+
+const isTyped = (line: object, field: unknown): boolean =>
+  String((line as Record<string, unknown>)[String(field)] ?? '').trim() !== '';
 
 function lineAmount(line: Partial<TypedLine>, lots: readonly FreeLot[]): Decimal {
   const fixed = 'fixedPrice' in line ? (line.fixedPrice ?? '') : '';

@@ -3,6 +3,7 @@ import { Plus } from 'lucide-react';
 import { useMemo } from 'react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
+import { useCheckOnLeaving } from '../../../components/use-check-on-leaving.ts';
 import { moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { soldByQuery } from '../purchase-orders.queries.ts';
@@ -19,14 +20,14 @@ interface OrderLinesProps {
 /** What is ordered, line by line, and what it comes to. */
 export function OrderLines({ leathers, hardware }: OrderLinesProps) {
   const { fields, append, remove } = useFieldArray<{ lines: TypedLine[] }>({ name: 'lines' });
-  const { currency } = useWorkshop();
   const offers = useOffers();
   const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
   const lots = useFreeLots(lines);
+  const checkOnLeaving = useCheckOnLeaving();
   const add = (of: 'leather' | 'hardware') =>
     append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
   return (
-    <fieldset className="min-w-0">
+    <fieldset className="min-w-0" onBlur={checkOnLeaving}>
       <legend className="mb-3 text-lg font-semibold">What to order</legend>
       <div className="space-y-5">
         {fields.map((field, at) =>
@@ -64,11 +65,21 @@ export function OrderLines({ leathers, hardware }: OrderLinesProps) {
           <Plus size={18} aria-hidden="true" /> Work on a lot
         </Button>
       </div>
-      <p className="mt-3 font-semibold">
-        Together {currency} {moneyText(amountOf(lines, lots))}
-        <span className="font-normal text-ink-soft">, before carriage and tax</span>
-      </p>
+      <Together amount={amountOf(lines, lots)} />
     </fieldset>
+  );
+}
+
+function Together({ amount }: { amount: string | undefined }) {
+  const { currency } = useWorkshop();
+  if (amount === undefined) {
+    return <p className="mt-3 text-ink-soft">There is a sum when every figure is right.</p>;
+  }
+  return (
+    <p className="mt-3 font-semibold">
+      Together {currency} {moneyText(amount)}
+      <span className="font-normal text-ink-soft">, before carriage and tax</span>
+    </p>
   );
 }
 
