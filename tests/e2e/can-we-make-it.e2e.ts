@@ -76,7 +76,7 @@ walk('the owner drafts what is short with one press, and not twice', async ({ pa
   await keyboardAlone.press(page.getByRole('button', { name: 'Draft the purchase orders' }));
   await page.getByText('Drafted, not sent yet:').waitFor();
   await page
-    .getByText(/is drafted for it: send it\./)
+    .getByText(/is drafted for it and still to be sent\./)
     .first()
     .waitFor();
   await page.getByRole('button', { name: 'Draft the purchase orders' }).click();

@@ -207,7 +207,7 @@ describe('Can we make it?', () => {
     const drafted = { ...fittings, drafted: 100, drafts: ['P-0012'] };
     const [facts] = checkRuns(shop({ items: [rivets(0, { buying: drafted })] }), [run(90)]);
     expect(hardwareWords(facts!.items[0]!, say)).toBe(
-      'Rivet: 90 needed, 0 free, 90 short. P-0012 is drafted for it: send it. Ordered from Fennbridge Fittings today, it is here by 2026-12-04.',
+      'Rivet: 90 needed, 0 free, 90 short. P-0012 is drafted for it and still to be sent. Ordered from Fennbridge Fittings today, it is here by 2026-12-04.',
     );
   });
 

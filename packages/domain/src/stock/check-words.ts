@@ -154,7 +154,7 @@ function remedy(standing: Standing, buying: Sourcing, buy: string | null, say: S
   const drafted =
     standing.drafted > 0
       ? [
-          `${buying.drafts.join(' and ')} is drafted for ${buy === null ? 'it' : 'a part of it'}: send it.`,
+          `${buying.drafts.join(' and ')} is drafted for ${buy === null ? 'it' : 'a part of it'} and still to be sent.`,
         ]
       : [];
   const when =

@@ -330,7 +330,7 @@ describe('drafting what is short', () => {
     expect(again.orders).toEqual([]);
     expect(again.notes).toContain(`Rivet 9 mm is on draft ${rivets?.number} already: send it.`);
     expect(rivetsOf(await check(runs), 0)?.sentence).toContain(
-      `${rivets?.number} is drafted for it: send it.`,
+      `${rivets?.number} is drafted for it and still to be sent.`,
     );
   });
 
