@@ -1,3 +1,4 @@
+import type { Endpoint } from '@hidewright/contract';
 import type { MiddlewareFunction } from 'react-router-dom';
 import { redirect } from 'react-router-dom';
 import { sessionQuery } from '../features/session/session.queries.ts';
@@ -21,6 +22,16 @@ export const guardRoom: MiddlewareFunction = async ({ request }) => {
   if (!person || !room || room.roles.includes(person.role)) return;
   throw redirect(`/closed${room.path}`);
 };
+
+/** A form opens only to those who may save it: whoever else comes by its address is told so. */
+export const opensFor =
+  ({ access }: Endpoint): MiddlewareFunction =>
+  async () => {
+    const { person } = await queryClient.ensureQueryData(sessionQuery());
+    if (typeof access === 'string' || (person && access.includes(person.role))) return;
+    const sentence = `Only the ${access.join(' or the ')} can write this. You can read what is there.`;
+    throw new Response(sentence, { status: 403 });
+  };
 
 /** Where to go after signing in: only ever a place within this program. */
 export function placeAfterSignIn(search: URLSearchParams): string {

@@ -1,4 +1,6 @@
+import { draftInvoice } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
+import { opensFor } from '../guard.ts';
 
 const numberOf = (invoice: unknown) => (invoice as { number: string | null }).number ?? 'Draft';
 
@@ -13,7 +15,12 @@ export const booksRoutes: RouteObject[] = [
         handle: { crumb: 'Invoices' },
         children: [
           { index: true, lazy: () => import('./books/invoices.tsx') },
-          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./books/new-invoice.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            middleware: [opensFor(draftInvoice)],
+            lazy: () => import('./books/new-invoice.tsx'),
+          },
           { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./books/invoice.tsx') },
         ],
       },

@@ -1,4 +1,6 @@
+import { addCustomer, createQuote, changeQuote } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
+import { opensFor } from '../guard.ts';
 
 const nameOf = (customer: unknown) => (customer as { name: string }).name;
 const numberOf = (paper: unknown) => (paper as { number: string }).number;
@@ -14,7 +16,12 @@ export const counterRoutes: RouteObject[] = [
         handle: { crumb: 'Quotes' },
         children: [
           { index: true, lazy: () => import('./counter/quotes.tsx') },
-          { path: 'new', handle: { crumb: 'New' }, lazy: () => import('./counter/new-quote.tsx') },
+          {
+            path: 'new',
+            handle: { crumb: 'New' },
+            middleware: [opensFor(createQuote)],
+            lazy: () => import('./counter/new-quote.tsx'),
+          },
           { path: ':id', handle: { crumb: numberOf }, lazy: () => import('./counter/quote.tsx') },
           {
             path: ':id/workings',
@@ -24,6 +31,7 @@ export const counterRoutes: RouteObject[] = [
           {
             path: ':id/change',
             handle: { crumb: numberOf },
+            middleware: [opensFor(changeQuote)],
             lazy: () => import('./counter/change-quote.tsx'),
           },
         ],
@@ -44,6 +52,7 @@ export const counterRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addCustomer)],
             lazy: () => import('./counter/new-customer.tsx'),
           },
           { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./counter/customer.tsx') },

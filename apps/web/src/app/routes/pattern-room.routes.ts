@@ -1,4 +1,6 @@
+import { addPattern, addTool, changePattern } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
+import { opensFor } from '../guard.ts';
 
 const nameOf = (thing: unknown) => (thing as { name: string }).name;
 
@@ -16,6 +18,7 @@ export const patternRoomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addPattern)],
             lazy: () => import('./pattern-room/new-pattern.tsx'),
           },
           {
@@ -46,6 +49,7 @@ export const patternRoomRoutes: RouteObject[] = [
           {
             path: ':id/change',
             handle: { crumb: nameOf },
+            middleware: [opensFor(changePattern)],
             lazy: () => import('./pattern-room/change-pattern.tsx'),
           },
         ],
@@ -70,6 +74,7 @@ export const patternRoomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addTool)],
             lazy: () => import('./pattern-room/new-tool.tsx'),
           },
           { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./pattern-room/tool.tsx') },

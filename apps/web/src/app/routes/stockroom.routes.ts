@@ -1,4 +1,13 @@
+import {
+  addHardware,
+  addLeather,
+  addPurchaseOrder,
+  addSupplier,
+  changePurchaseOrder,
+  sellFinished,
+} from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
+import { opensFor } from '../guard.ts';
 
 const nameOf = (thing: unknown) => (thing as { name: string }).name;
 const finishedOf = (thing: unknown) => (thing as { patternName: string }).patternName;
@@ -67,6 +76,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addLeather)],
             lazy: () => import('./stockroom/new-leather.tsx'),
           },
           { path: ':id', handle: { crumb: nameOf }, lazy: () => import('./stockroom/leather.tsx') },
@@ -88,6 +98,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addHardware)],
             lazy: () => import('./stockroom/new-hardware.tsx'),
           },
           {
@@ -115,6 +126,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: ':id/sell',
             handle: { crumb: finishedOf },
+            middleware: [opensFor(sellFinished)],
             lazy: () => import('./stockroom/sell-finished.tsx'),
           },
         ],
@@ -127,6 +139,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addSupplier)],
             lazy: () => import('./stockroom/new-supplier.tsx'),
           },
           {
@@ -144,6 +157,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'New' },
+            middleware: [opensFor(addPurchaseOrder)],
             lazy: () => import('./stockroom/new-purchase-order.tsx'),
           },
           {
@@ -154,6 +168,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: ':id/change',
             handle: { crumb: numberOf },
+            middleware: [opensFor(changePurchaseOrder)],
             lazy: () => import('./stockroom/change-purchase-order.tsx'),
           },
         ],
