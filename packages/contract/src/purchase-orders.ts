@@ -169,6 +169,8 @@ export const purchaseOrder = z
     /** The day on which the next of what is still to come is awaited; null where nothing is. */
     awaitedOn: z.string().nullable(),
     note: z.string(),
+    /** Of one that the check drafted, the runs that it is for; its supplier is not told. */
+    draftedFor: z.string(),
     lines: z.array(purchaseLine),
     /** How many deliveries of it have come. */
     receipts: z.int(),

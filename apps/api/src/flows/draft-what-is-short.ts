@@ -23,7 +23,7 @@ interface ToDraft {
 
 /**
  * Drafts an order to each supplier with what is short and on no draft yet, at the terms that what to order goes by,
- * with the runs that it is for in its note. Pressed again, it drafts nothing more, and says where it is.
+ * and keeps for which runs. Pressed again, it drafts nothing more, and says where it is.
  */
 export async function draftWhatIsShort(work: Work, checked: CheckedRuns): Promise<Drafted> {
   const lacking = lackingOf(checked);
@@ -45,20 +45,22 @@ async function draftEach(work: Work, all: readonly ToDraft[]): Promise<PurchaseO
   for (const supplierId of new Set(all.map((each) => each.supplierId))) {
     const own = all.filter((each) => each.supplierId === supplierId);
     orders.push(
-      await draftPurchaseOrder(work, {
-        supplierId,
-        // Worked out when it is sent, from whatever is on it by then.
-        expectedOn: null,
-        note: noteFor([...new Set(own.flatMap(({ runs }) => runs))]),
-        lines: own.map(({ line }) => line),
-      }),
+      await draftPurchaseOrder(
+        work,
+        {
+          supplierId,
+          // Worked out when it is sent, from whatever is on it by then.
+          expectedOn: null,
+          note: '',
+          lines: own.map(({ line }) => line),
+        },
+        sayRuns([...new Set(own.flatMap(({ runs }) => runs))]),
+      ),
     );
   }
   return orders;
 }
 
-/** The supplier reads it too: no customer and no design in it. */
-function noteFor(runs: readonly CheckedRun[]): string {
-  const said = runs.map(({ planned }) => `${planned.paper}, packed by ${sayDay(planned.by)}`);
-  return `For ${said.join('; ')}.`.slice(0, 2000);
-}
+/** Q-0007, packed by Mon 14 Dec 2026; Round coaster, packed by Wed 16 Dec 2026 */
+const sayRuns = (runs: readonly CheckedRun[]): string =>
+  runs.map(({ planned }) => `${planned.paper}, packed by ${sayDay(planned.by)}`).join('; ');

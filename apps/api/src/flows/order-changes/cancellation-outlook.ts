@@ -84,7 +84,7 @@ async function minutesHeld({ em }: Work, jobId: number): Promise<string> {
   return unscaled(held?.remaining ?? 0, 2).toString();
 }
 
-/** What was drafted from the check says which quotes it is for in its note. */
+/** What was drafted from the check keeps which quotes it is for. */
 async function draftedFor(
   { em }: Work,
   order: Order,
@@ -93,7 +93,7 @@ async function draftedFor(
   return em.execute(
     `SELECT p.id, p.number, s.name AS supplierName, p.state FROM purchase_order p
        JOIN supplier s ON s.id = p.supplier_id
-     WHERE p.state IN ('draft', 'sent', 'part received') AND instr(p.note, ? || ',') > 0 ORDER BY p.id`,
+     WHERE p.state IN ('draft', 'sent', 'part received') AND instr(p.drafted_for, ? || ',') > 0 ORDER BY p.id`,
     [number],
   );
 }

@@ -323,7 +323,8 @@ describe('drafting what is short', () => {
       state: 'draft',
       expectedOn: null,
       arrivesOn: '2026-12-04',
-      note: 'For Round coaster, packed by Mon 21 Dec 2026.',
+      note: '',
+      draftedFor: 'Round coaster, packed by Mon 21 Dec 2026',
       lines: [{ quantity: 300 }],
     });
     const again = await draft(runs);

@@ -27,10 +27,14 @@ export async function findPurchaseOrder(work: Work, id: number): Promise<Purchas
   return order;
 }
 
-/** Writes a new order to a supplier, to be sent later. */
+/**
+ * Writes a new order to a supplier, to be sent later.
+ * @param draftedFor the runs that it is for, in words for the shop alone
+ */
 export async function draftPurchaseOrder(
   work: Work,
   typed: BodyOf<typeof addPurchaseOrder>,
+  draftedFor = '',
 ): Promise<PurchaseOrder> {
   await requireSupplier(work, typed.supplierId);
   const { supplierId, expectedOn, note } = typed;
@@ -39,6 +43,7 @@ export async function draftPurchaseOrder(
     supplierId,
     expectedOn,
     note,
+    draftedFor,
     state: 'draft',
     createdAt: work.now.toISOString(),
   });

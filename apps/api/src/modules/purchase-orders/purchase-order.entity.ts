@@ -3,7 +3,7 @@ import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 /** An order to a supplier. */
 @Entity({ tableName: 'purchase_order' })
 export class PurchaseOrder {
-  [OptionalProps]?: 'note' | 'receipts' | 'version';
+  [OptionalProps]?: 'note' | 'draftedFor' | 'receipts' | 'version';
 
   @PrimaryKey({ type: 'integer', columnType: 'integer' })
   id!: number;
@@ -25,6 +25,10 @@ export class PurchaseOrder {
 
   @Property({ type: 'text', columnType: 'text' })
   note = '';
+
+  /** The runs that it was drafted for, if the check drafted it: the shop's own business, not its supplier's. */
+  @Property({ type: 'text', columnType: 'text' })
+  draftedFor = '';
 
   /** How many deliveries came: each makes a new version of the order. */
   @Property({ type: 'integer', columnType: 'integer' })

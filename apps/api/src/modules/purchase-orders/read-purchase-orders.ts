@@ -84,6 +84,7 @@ function toReply(
     arrivesOn: known.arrivals.get(order.id) ?? null,
     awaitedOn: awaitedOn(order, lines),
     note: order.note,
+    draftedFor: order.draftedFor,
     lines: lines.map((line) => toLine(line, order, known)),
     receipts: order.receipts,
     total: moneyText(lines.reduce((sum, line) => sum.plus(lineAmount(line)), new Decimal(0))),

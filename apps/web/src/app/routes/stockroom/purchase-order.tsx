@@ -57,6 +57,9 @@ export function Component() {
       >
         {isOwner && order.state === 'draft' && <OrderRemarksNotice order={order} />}
         <PurchaseLinesTable order={order} isOwner={isOwner} />
+        {order.draftedFor !== '' && (
+          <p className="mt-4 text-ink-soft">{`Drafted for ${order.draftedFor}; the supplier is not told.`}</p>
+        )}
       </Card>
       {order.note !== '' && (
         <Card title="Note to the supplier">
