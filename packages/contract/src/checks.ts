@@ -21,6 +21,8 @@ const checkAnswer = z
     enough: z.boolean(),
     /** The first day on which all of it can be there, bought today if need be; null where nobody can tell. */
     enoughOn: day.nullable(),
+    /** Whether some of it is to be bought that stands on no draft yet. */
+    toBuy: z.boolean(),
     /** The answer in words; where something is short, it says what to do. */
     sentence: z.string(),
   })

@@ -69,6 +69,7 @@ function toAnswer(
     short: text(Math.max(0, rule.asked - rule.manages)),
     enough: ok,
     enoughOn: null,
+    toBuy: false,
     sentence,
   };
 }

@@ -65,7 +65,7 @@ function notesOn({ plan, customerId, definition }: CheckedRun['planned']): strin
 const area = (thousandths: number): string => unscaled(thousandths, 3).toFixed();
 
 const figures = (
-  { needed, now, free, short, enoughOn }: Standing,
+  { needed, now, free, short, enoughOn, buy, drafted }: Standing,
   text: (quantity: number) => string,
 ) => ({
   needed: text(needed),
@@ -74,6 +74,7 @@ const figures = (
   short: text(short),
   enough: short === 0,
   enoughOn,
+  toBuy: buy > drafted,
 });
 
 function leatherAnswer(facts: LeatherFacts, say: Say): CheckAnswer {
@@ -107,6 +108,7 @@ function toolAnswer(facts: ToolFacts): CheckAnswer {
     short: String(Math.max(0, strikesNeeded - left)),
     enough: ok,
     enoughOn: null,
+    toBuy: false,
     sentence: toolWords(facts),
   };
 }
@@ -123,6 +125,7 @@ function hoursAnswer(facts: HoursFacts, say: Say): CheckAnswer {
     short: text(Math.max(0, facts.needed - facts.free)),
     enough: facts.ok,
     enoughOn: facts.earliest,
+    toBuy: false,
     sentence: hoursWords(facts, say),
   };
 }

@@ -19,7 +19,7 @@ function standing(item: Suggested, say: Say, dueOn: string | null): string[] {
   if (state === 'now')
     return [`${have}, below ${mark}.`, draftWords(item, say), orderWords(item, say)];
   if (state === 'drafted') {
-    return [`${have}, below ${mark}.`, `What is on ${draftNames(item)} will do: send it.`];
+    return [`${have}, below ${mark}.`, `What is on ${draftNames(item)} will do once it is sent.`];
   }
   if (state === 'soon') {
     const when = dueOn === null ? '' : ` about ${sayDay(dueOn)}`;

@@ -241,7 +241,7 @@ describe('drafting', () => {
     expect(order?.lines).toMatchObject([{ quantity: 500, unitPrice: '0.17' }]);
     const drafted = await rivets();
     expect(drafted).toMatchObject({ state: 'drafted', drafted: '500', quantity: '0' });
-    expect(drafted.why).toContain(`What is on draft ${order?.number} will do: send it.`);
+    expect(drafted.why).toContain(`What is on draft ${order?.number} will do once it is sent.`);
 
     const again = await draft([lineFor(item)]).expect(201);
     expect(again.body.orders).toEqual([]);

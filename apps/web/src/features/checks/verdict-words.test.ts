@@ -12,6 +12,7 @@ const answer = (about: CheckAnswer['about'], enough: boolean): CheckAnswer => ({
   free: '1',
   short: '0',
   enoughOn: null,
+  toBuy: false,
   sentence: '',
 });
 

@@ -70,13 +70,12 @@ export function CanWeMakeIt(props: CanWeMakeItProps) {
         <div aria-busy={isFetching}>
           <Verdict check={check} />
           <CheckAnswers check={check} />
-          {mayOrder && lacksStock(check) && (
-            <div className="mb-4">
-              <DraftOrders
-                runs={[{ quoteId, quantity: check.quantity, option, by: check.by }]}
-                onDrafted={refetch}
-              />
-            </div>
+          {mayOrder && (
+            <DraftOrders
+              runs={[{ quoteId, quantity: check.quantity, option, by: check.by }]}
+              answers={check.answers}
+              onDrafted={refetch}
+            />
           )}
           {children?.(check)}
         </div>
@@ -84,13 +83,6 @@ export function CanWeMakeIt(props: CanWeMakeItProps) {
     </Card>
   );
 }
-
-/** What can be bought: leather, hardware or supplies. */
-const lacksStock = ({ answers }: RunCheck): boolean =>
-  answers.some(
-    ({ about, enough }) =>
-      !enough && (about === 'leather' || about === 'hardware' || about === 'supplies'),
-  );
 
 const mendable = ({ earliestDay, by }: RunCheck): boolean =>
   earliestDay !== null && earliestDay <= by;

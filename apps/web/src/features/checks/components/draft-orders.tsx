@@ -1,5 +1,4 @@
-import type { draftShort } from '@hidewright/contract';
-import type { BodyInputOf, ReplyOf } from '@hidewright/contract';
+import type { BodyInputOf, CheckAnswer, draftShort, ReplyOf } from '@hidewright/contract';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Notice } from '../../../components/notice.tsx';
@@ -9,29 +8,34 @@ import { useDraftShort } from '../checks.mutations.ts';
 
 interface DraftOrdersProps {
   runs: BodyInputOf<typeof draftShort>['runs'];
+  answers: readonly CheckAnswer[];
   /** The answer may say something else now: what is drafted is counted. */
   onDrafted?: (() => unknown) | undefined;
 }
 
-/** One press drafts what is short, an order for each supplier. */
-export function DraftOrders({ runs, onDrafted }: DraftOrdersProps) {
+/** One press drafts what is short, an order for each supplier; afterwards it says what was drafted. */
+export function DraftOrders({ runs, answers, onDrafted }: DraftOrdersProps) {
   const send = useDraftShort();
   const [drafted, setDrafted] = useState<ReplyOf<typeof draftShort>>();
   async function draft() {
     setDrafted(await send.mutateAsync({ body: { runs } }));
     await onDrafted?.();
   }
+  const needed = answers.some(({ toBuy }) => toBuy);
+  if (!needed && !drafted) return null;
   return (
-    <div className="space-y-3">
+    <div className="mb-4 space-y-3">
       {send.error && (
         <Notice tone="danger" live>
           {send.error instanceof ApiProblem ? send.error.detail : 'That did not work. Try again.'}
         </Notice>
       )}
       {drafted && <DraftedNotice drafted={drafted} />}
-      <Button busy={send.isPending} onClick={() => void draft().catch(() => undefined)}>
-        Draft the purchase orders
-      </Button>
+      {needed && (
+        <Button busy={send.isPending} onClick={() => void draft().catch(() => undefined)}>
+          Draft the purchase orders
+        </Button>
+      )}
     </div>
   );
 }

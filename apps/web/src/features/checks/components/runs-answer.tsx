@@ -38,7 +38,13 @@ export function RunsAnswer({ asked, check, mayOrder, onDrafted }: RunsAnswerProp
             {check.short.map((item) => (
               <ShortItem key={`${item.of} ${item.id}`} item={item} />
             ))}
-            {mayOrder && <DraftOrders runs={asked} onDrafted={onDrafted} />}
+            {mayOrder && (
+              <DraftOrders
+                runs={asked}
+                answers={check.runs.flatMap(({ answers }) => answers)}
+                onDrafted={onDrafted}
+              />
+            )}
           </div>
         </Card>
       )}
