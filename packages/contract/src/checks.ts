@@ -56,7 +56,10 @@ export const runCheck = z
     yes: z.boolean(),
     answers: z.array(checkAnswer),
     lots: z.array(checkLot),
-    /** What is worth knowing and stops nothing. */
+    patternId: id,
+    /** What its pattern should be looked at for, with what to do; it stops nothing. */
+    remarks: z.array(z.string()),
+    /** What else is worth knowing and stops nothing. */
     notes: z.array(z.string()),
     /**
      * The first day by which it can be packed when what is short is bought today, tooling aside; null where nobody
@@ -168,7 +171,6 @@ export const runsCheck = z
     runs: z.array(
       runCheck.extend({
         quoteId: id.nullable(),
-        patternId: id,
         /** "Q-0012 Heron tags", or the pattern's name. */
         name: z.string(),
         option: z.string().nullable(),

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { Pattern } from '@hidewright/contract';
+import type { Pattern, RunsCheck } from '@hidewright/contract';
 import { agreedQuote, readyForTheBench, takenOn, ticketOf } from '../testing/bench-shop.ts';
 import { startTestShop } from '../testing/test-shop.ts';
 
@@ -94,6 +94,68 @@ describe('a kit on a pattern', () => {
       hardware: [{ hardwareId: kit, perPiece: 1, layers: 3 }],
     }));
     expect(three.hardware[0]?.remarks[1]).toContain('Three layers');
+  });
+});
+
+describe('hardware that is set before the last pieces fail', () => {
+  const said = async (runs: object[]) => {
+    const { body } = await shop.as('maker').post('/api/checks').send({ runs }).expect(200);
+    return body.runs[0] as RunsCheck['runs'][number];
+  };
+  const sentenceOf = ({ answers }: RunsCheck['runs'][number], of: string) =>
+    answers.find(({ name }) => name === of)?.sentence;
+
+  it('is checked, held and listed with an allowance for losses where its step is known', async () => {
+    const ring = await add({ name: 'Split ring', unitPrice: '0.07' });
+    const buckle = await add({ name: 'Buckle', unitPrice: '0.60' });
+    const dye = await add({ name: 'Dye', kind: 'supplies', unit: 'ml', unitPrice: '0.04' });
+    const hardware = [ring, buckle, dye].map((id) => ({ hardwareId: id, quantity: 130 }));
+    await owner().post('/api/receipts').send({ hardware }).expect(201);
+    await changePattern(() => ({
+      hardware: [
+        { hardwareId: ring, perPiece: 2, fromStep: 0 },
+        { hardwareId: buckle, perPiece: 1 },
+        { hardwareId: dye, perPiece: 1 },
+      ],
+    }));
+    const asked = { patternId: ready.patternId, quantity: 50, by: '2026-12-18' };
+    const check = await said([asked]);
+    const { cutCount } = check;
+    expect(cutCount).toBeGreaterThan(51);
+    const more = cutCount - 50;
+    expect(sentenceOf(check, 'Split ring')).toBe(
+      `Split ring: take ${2 * cutCount} of 130 free. ${2 * more} of the ${2 * cutCount} are for losses.`,
+    );
+    expect(sentenceOf(check, 'Buckle')).toBe('Buckle: take 50 of 130 free.');
+    expect(check).toMatchObject({
+      patternId: ready.patternId,
+      remarks: [
+        `${more} more pieces are cut than ordered, and no spares of Buckle are counted for them: the pattern does not say from when on it is needed. Lay some by, or say it on the pattern.`,
+      ],
+    });
+    const quote = await agreedQuote(ready, 50);
+    expect((await said([{ quoteId: quote.id }])).remarks).toEqual([
+      `${more} more pieces are cut than ordered, and no spares of Buckle are counted for them: the pattern as quoted does not say from when on it is needed. Lay some by. Say it on the pattern, and the next quote counts them.`,
+    ]);
+    const ticket = await ticketOf(ready, await takenOn(ready, 50, { evenIfShort: true }));
+    expect(ticket.hardware.find(({ name }) => name === 'Split ring')).toMatchObject({
+      needed: 2 * cutCount,
+      held: 2 * cutCount,
+    });
+    expect(await reservedOf(ring)).toBe(2 * cutCount);
+  });
+
+  it('has its allowance in every part of a kit, and no remark where nothing fails', async () => {
+    await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1, fromStep: 0 }] }));
+    const asked = { patternId: ready.patternId, quantity: 20, by: '2026-12-18' };
+    const check = await said([asked]);
+    for (const part of ['Cap 9 mm', 'Post 8 mm'])
+      expect(sentenceOf(check, part)).toContain(
+        ` ${check.cutCount - 20} of the ${check.cutCount} are for losses.`,
+      );
+    const work = { kind: 'minutesPer100', minutes: '60', rejectPercent: '0' };
+    await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1 }], work }));
+    expect((await said([asked])).remarks).toEqual([]);
   });
 });
 

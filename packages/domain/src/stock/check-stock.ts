@@ -104,6 +104,13 @@ export interface ToolNeed {
   otherwise: string;
 }
 
+export interface HardwareNeed {
+  hardwareId: number;
+  quantity: number;
+  /** of it, what the pieces ordered take where nothing is lost; all of it where nobody said */
+  ordered?: number;
+}
+
 /** What one run asks for. */
 export interface RunNeeds {
   /** the day by which it must be packed */
@@ -111,7 +118,7 @@ export interface RunNeeds {
   /** pieces to cut */
   pieces: number;
   leather: LeatherNeed;
-  hardware: readonly { hardwareId: number; quantity: number }[];
+  hardware: readonly HardwareNeed[];
   tools: readonly ToolNeed[];
   /** bench time in hundredths of a minute, and the same with the waits between steps */
   minutes: number;

@@ -20,6 +20,7 @@ import { sayDay } from '../../modules/quotes/say-day.ts';
 import { sayRackArea } from '../../modules/stock/say-area.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { CheckedRun } from './checked-runs.ts';
+import { patternRemarks } from './pattern-remarks.ts';
 
 /** How this shop says areas and days. */
 export async function sayFor(em: EntityManager): Promise<Say> {
@@ -46,6 +47,8 @@ export function runReply({ planned, facts, press, finished }: CheckedRun, say: S
     yes: answers.every(({ enough }) => enough),
     answers,
     lots: facts.leather.takes.map(toLot),
+    patternId: plan.patternId,
+    remarks: patternRemarks({ planned, facts }),
     notes: [...finished, ...notesOn(planned)],
     earliestDay: facts.earliest,
   };

@@ -1,9 +1,10 @@
 import type { CheckAnswer, RunCheck } from '@hidewright/contract';
+import { Notice } from '../../../components/notice.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 
 /** Each answer in a sentence, and the lots to go to; where something is short, with the way to put it right. */
-export function CheckAnswers({ check }: { check: Pick<RunCheck, 'answers' | 'lots' | 'notes'> }) {
+export function CheckAnswers({ check }: { check: RunCheck }) {
   return (
     <>
       <ul className="my-4 divide-y divide-stitch/60" aria-label="Answers">
@@ -20,12 +21,28 @@ export function CheckAnswers({ check }: { check: Pick<RunCheck, 'answers' | 'lot
           </li>
         ))}
       </ul>
+      <PatternRemarks check={check} />
       {check.notes.map((note) => (
         <p key={note} className="mb-2 text-ink-soft">
           {note}
         </p>
       ))}
     </>
+  );
+}
+
+function PatternRemarks({ check: { remarks, patternId } }: { check: RunCheck }) {
+  if (remarks.length === 0) return null;
+  return (
+    <Notice
+      tone="attention"
+      className="mb-4"
+      actions={<TextLink to={`/pattern-room/patterns/${patternId}`}>Pattern</TextLink>}
+    >
+      {remarks.map((remark) => (
+        <p key={remark}>{remark}</p>
+      ))}
+    </Notice>
   );
 }
 
