@@ -9,6 +9,8 @@ const checkAnswer = z
     about: z.enum(['leather', 'hardware', 'supplies', 'tooling', 'press', 'hours']),
     /** What it is about: a leather, a kind of rivet, the cutting die, the bench. */
     name: z.string(),
+    /** The hardware to open: what it is about, or what a missing die sets. */
+    hardwareId: id.nullable(),
     unit: z.enum(['mm2', 'piece', 'strike', 'mm', 'minute']),
     /** Exact decimals in the unit. */
     needed: z.string(),

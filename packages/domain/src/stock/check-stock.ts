@@ -96,12 +96,14 @@ export interface LeatherNeed {
 }
 
 export interface ToolNeed {
-  /** Cutting die, Stamp plate */
+  /** Cutting die, Stamp plate, Setting die SD-9 */
   word: string;
   /** those on the rack that serve, the fittest first */
   choices: readonly number[];
   /** what to do where none is here */
   otherwise: string;
+  /** of a setting die, the hardware that it sets */
+  setsHardwareId?: number | undefined;
 }
 
 export interface HardwareNeed {

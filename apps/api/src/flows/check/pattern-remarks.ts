@@ -5,9 +5,10 @@ import type { PlannedRun } from './runs-asked.ts';
 type Checked = Pick<CheckedRun, 'planned' | 'facts'>;
 
 /** What a run's pattern should be looked at for, in sentences that say what to do; it stops nothing. */
-export function patternRemarks(checked: Checked): string[] {
+export function patternRemarks(checked: Checked & Pick<CheckedRun, 'misfits'>): string[] {
   const names = withoutSpares(checked);
-  return names.length === 0 ? [] : [noSparesWords(checked.planned, names)];
+  const spares = names.length === 0 ? [] : [noSparesWords(checked.planned, names)];
+  return [...checked.misfits, ...spares];
 }
 
 /** Hardware that is counted to the piece although pieces will fail: nobody said which of them need it. */

@@ -29,7 +29,10 @@ export async function sayFor(em: EntityManager): Promise<Say> {
 }
 
 /** Every question answered, with what to take or what mends it. */
-export function runReply({ planned, facts, press, finished }: CheckedRun, say: Say): RunCheck {
+export function runReply(
+  { planned, facts, press, misfits, finished }: CheckedRun,
+  say: Say,
+): RunCheck {
   const { plan, by } = planned;
   const answers = [
     leatherAnswer(facts.leather, say),
@@ -48,7 +51,7 @@ export function runReply({ planned, facts, press, finished }: CheckedRun, say: S
     answers,
     lots: facts.leather.takes.map(toLot),
     patternId: plan.patternId,
-    remarks: patternRemarks({ planned, facts }),
+    remarks: patternRemarks({ planned, facts, misfits }),
     notes: [...finished, ...notesOn(planned)],
     earliestDay: facts.earliest,
   };
@@ -85,6 +88,7 @@ function leatherAnswer(facts: LeatherFacts, say: Say): CheckAnswer {
     ...figures(facts.standing, area),
     about: 'leather',
     name,
+    hardwareId: null,
     unit: 'mm2',
     enough: facts.piecesShort === 0,
     sentence: leatherWords(facts, say),
@@ -92,9 +96,9 @@ function leatherAnswer(facts: LeatherFacts, say: Say): CheckAnswer {
 }
 
 function itemAnswer(facts: ItemFacts, say: Say): CheckAnswer {
-  const { name, kind } = facts.item;
+  const { name, kind, hardwareId } = facts.item;
   const sentence = hardwareWords(facts, say);
-  return { ...figures(facts, String), about: kind, name, unit: 'piece', sentence };
+  return { ...figures(facts, String), about: kind, name, hardwareId, unit: 'piece', sentence };
 }
 
 function toolAnswer(facts: ToolFacts): CheckAnswer {
@@ -103,6 +107,7 @@ function toolAnswer(facts: ToolFacts): CheckAnswer {
   return {
     about: 'tooling',
     name: tool?.name ?? need.word,
+    hardwareId: need.setsHardwareId ?? null,
     unit: 'strike',
     needed: String(strikesNeeded),
     freeNow: String(left),
@@ -119,6 +124,7 @@ function hoursAnswer(facts: HoursFacts, say: Say): CheckAnswer {
   return {
     about: 'hours',
     name: 'Bench hours',
+    hardwareId: null,
     unit: 'minute',
     needed: text(facts.needed),
     freeNow: text(facts.free),

@@ -6,6 +6,7 @@ const answer = (about: CheckAnswer['about'], enough: boolean): CheckAnswer => ({
   about,
   enough,
   name: '',
+  hardwareId: null,
   unit: 'piece',
   needed: '1',
   freeNow: '1',

@@ -15,7 +15,7 @@ export function CheckAnswers({ check }: { check: RunCheck }) {
                 {answer.enough ? 'enough' : 'short'}
               </StateMark>
               <span className="min-w-0 grow basis-64">{answer.sentence}</span>
-              {!answer.enough && <Remedy about={answer.about} />}
+              {!answer.enough && <Remedy answer={answer} />}
             </div>
             {answer.about === 'leather' && <Lots lots={check.lots} />}
           </li>
@@ -61,16 +61,17 @@ function Lots({ lots }: Pick<RunCheck, 'lots'>) {
   );
 }
 
-const remedies: Record<CheckAnswer['about'], { to: string; word: string } | null> = {
+/** Where what is no hardware is put right. */
+const remedies: Partial<Record<CheckAnswer['about'], { to: string; word: string }>> = {
   leather: { to: '/stockroom', word: 'Stockroom' },
-  hardware: { to: '/stockroom/hardware', word: 'Stockroom' },
-  supplies: { to: '/stockroom/hardware', word: 'Stockroom' },
   tooling: { to: '/pattern-room', word: 'Pattern room' },
-  press: null,
   hours: { to: '/bench', word: 'Bench' },
 };
 
-function Remedy({ about }: { about: CheckAnswer['about'] }) {
-  const remedy = remedies[about];
+function Remedy({ answer: { about, hardwareId } }: { answer: CheckAnswer }) {
+  const remedy =
+    hardwareId === null
+      ? remedies[about]
+      : { to: `/stockroom/hardware/${hardwareId}`, word: 'Stockroom' };
   return remedy && <TextLink to={remedy.to}>{remedy.word}</TextLink>;
 }
