@@ -48,6 +48,14 @@ walk(
     const rivets = page.getByRole('region', { name: 'Rivets 7 mm, antique brass' }).first();
     await rivets.getByText('Fennbridge Fittings').waitFor();
     await rivets.getByText(saidFromNow(3)).first().waitFor();
+    await page
+      .getByText(/of the [\d,]+ are for losses\./)
+      .first()
+      .waitFor();
+    await page
+      .getByText(/no spares of Buckles 20 mm, solid brass are counted/)
+      .first()
+      .waitFor();
     await rivets.getByText('Day by day').click();
     await rivets.getByRole('table').waitFor();
     await page

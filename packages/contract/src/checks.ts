@@ -9,6 +9,8 @@ const checkAnswer = z
     about: z.enum(['leather', 'hardware', 'supplies', 'tooling', 'press', 'hours']),
     /** What it is about: a leather, a kind of rivet, the cutting die, the bench. */
     name: z.string(),
+    /** The hardware to open: what it is about, or what a missing die sets. */
+    hardwareId: id.nullable(),
     unit: z.enum(['mm2', 'piece', 'strike', 'mm', 'minute']),
     /** Exact decimals in the unit. */
     needed: z.string(),
@@ -58,7 +60,10 @@ export const runCheck = z
     yes: z.boolean(),
     answers: z.array(checkAnswer),
     lots: z.array(checkLot),
-    /** What is worth knowing and stops nothing. */
+    patternId: id,
+    /** What its pattern should be looked at for, with what to do; it stops nothing. */
+    remarks: z.array(z.string()),
+    /** What else is worth knowing and stops nothing. */
     notes: z.array(z.string()),
     /**
      * The first day by which it can be packed when what is short is bought today, tooling aside; null where nobody
@@ -170,7 +175,6 @@ export const runsCheck = z
     runs: z.array(
       runCheck.extend({
         quoteId: id.nullable(),
-        patternId: id,
         /** "Q-0012 Heron tags", or the pattern's name. */
         name: z.string(),
         option: z.string().nullable(),

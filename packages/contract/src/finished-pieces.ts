@@ -131,7 +131,7 @@ export const takeFinished = endpoint({
   params: idParams,
   body: z.strictObject({
     as: z.enum(waysOut, 'Choose what becomes of them.'),
-    /** Who buys them; must be named where they bear a customer's mark. */
+    /** Who buys them or is given them; must be named where they bear a customer's mark. */
     customerId: id.nullable().default(null),
     quantity: positiveCount,
     reason: line(200, 'Say to whom or why, in a few words.'),

@@ -55,6 +55,10 @@ const jobLot = z
     heightMm: z.string().nullable(),
     /** Still held for this job. */
     heldAreaMm2: z.string(),
+    /** Of it in all, for whomever. */
+    onHandAreaMm2: z.string(),
+    /** Held for jobs and not there, since a count found less. */
+    missingAreaMm2: z.string(),
     /** On hand and held by nobody. */
     freeAreaMm2: z.string(),
     /** Taken for this job, less what came back. */

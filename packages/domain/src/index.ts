@@ -88,7 +88,7 @@ export * from './tooling/plate-advice.ts';
 export * from './tooling/plate-choice.ts';
 
 export * from './costing/run-input.ts';
-export { unitsFor } from './costing/hardware-counts.ts';
+export { hardwareOrdered, lossesUnsaid, unitsFor } from './costing/hardware-counts.ts';
 export { hourlyKinds } from './costing/cost-lines.ts';
 export type { CostKind, CostLine } from './costing/cost-lines.ts';
 export type { RunCost } from './costing/cost-run.ts';

@@ -20,7 +20,6 @@ export async function checkAskedRuns(
   const runs = checked.runs.map((run) => ({
     ...runReply(run, say),
     quoteId: run.planned.quoteId,
-    patternId: run.planned.plan.patternId,
     name: run.planned.name,
     option: run.planned.option,
     turn: run.facts.turn,

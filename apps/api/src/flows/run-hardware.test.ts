@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import type { Pattern } from '@hidewright/contract';
+import type { Pattern, RunsCheck } from '@hidewright/contract';
 import { agreedQuote, readyForTheBench, takenOn, ticketOf } from '../testing/bench-shop.ts';
 import { startTestShop } from '../testing/test-shop.ts';
 
@@ -25,7 +25,6 @@ beforeAll(async () => {
     unitPrice: '0',
     priceFromParts: true,
     settingDie: 'SD-9',
-    settingDieHere: false,
     parts: [
       { hardwareId: cap, quantity: 1 },
       { hardwareId: post, quantity: 1 },
@@ -45,15 +44,22 @@ const add = async (body: object): Promise<number> =>
 const reservedOf = async (id: number): Promise<number> =>
   (await owner().get(`/api/hardware/${id}`).expect(200)).body.reserved;
 
-async function changePattern(change: (before: Pattern) => object): Promise<Pattern> {
-  const { body } = await owner().get(`/api/patterns/${ready.patternId}`).expect(200);
-  const definition = { ...body.definition, ...change(body) };
-  const changed = await owner()
-    .patch(`/api/patterns/${ready.patternId}`)
-    .set('If-Match', `"${body.version}"`)
-    .send({ definition })
-    .expect(200);
-  return changed.body;
+/** The first run's answers. */
+async function said(runs: object[]): Promise<RunsCheck['runs'][number]> {
+  const { body } = await shop.as('maker').post('/api/checks').send({ runs }).expect(200);
+  return (body as RunsCheck).runs[0]!;
+}
+
+async function change(path: string, body: object) {
+  const { version } = (await owner().get(`/api/${path}`).expect(200)).body as { version: number };
+  return owner().patch(`/api/${path}`).set('If-Match', `"${version}"`).send(body).expect(200);
+}
+
+async function changePattern(differs: (before: Pattern) => object): Promise<Pattern> {
+  const path = `patterns/${ready.patternId}`;
+  const before = (await owner().get(`/api/${path}`).expect(200)).body as Pattern;
+  const definition = { ...before.definition, ...differs(before) };
+  return (await change(path, { definition })).body;
 }
 
 describe('a kit on a pattern', () => {
@@ -76,15 +82,11 @@ describe('a kit on a pattern', () => {
   });
 
   it('says what speaks against setting it through the folded leather', async () => {
+    await change(`hardware/${kit}`, { settingDieHere: false });
     const unsaid = await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1 }] }));
     const die = 'It is set with the die SD-9, which is not in the shop.';
     expect(unsaid.hardware).toMatchObject([{ remarks: [die] }]);
-    const { body: leather } = await owner().get(`/api/leathers/${ready.leatherId}`).expect(200);
-    await owner()
-      .patch(`/api/leathers/${ready.leatherId}`)
-      .set('If-Match', `"${leather.version}"`)
-      .send({ weightLowOz: '5', weightHighOz: '6' })
-      .expect(200);
+    await change(`leathers/${ready.leatherId}`, { weightLowOz: '5', weightHighOz: '6' });
     const { body } = await owner().get(`/api/patterns/${ready.patternId}`).expect(200);
     expect(body.hardware[0].remarks).toEqual([
       die,
@@ -94,6 +96,74 @@ describe('a kit on a pattern', () => {
       hardware: [{ hardwareId: kit, perPiece: 1, layers: 3 }],
     }));
     expect(three.hardware[0]?.remarks[1]).toContain('Three layers');
+    const check = await said([{ patternId: ready.patternId, quantity: 20, by: '2026-12-18' }]);
+    expect(check.remarks[0]).toMatch(/^Rivet in two: Post 8 mm: The post is 8 mm .* Three layers/);
+    expect(check.answers.find(({ name }) => name === 'Post 8 mm')?.enough).toBe(true);
+    expect(check.answers.find(({ name }) => name === 'Setting die SD-9')).toMatchObject({
+      about: 'tooling',
+      hardwareId: kit,
+      enough: false,
+      sentence:
+        'Setting die SD-9: not in the shop yet. It sets Rivet in two. Order it, or say at Rivet in two that you have it.',
+    });
+  });
+});
+
+describe('hardware that is set before the last pieces fail', () => {
+  const sentenceOf = ({ answers }: RunsCheck['runs'][number], of: string) =>
+    answers.find(({ name }) => name === of)?.sentence;
+
+  it('is checked, held and listed with an allowance for losses where its step is known', async () => {
+    const ring = await add({ name: 'Split ring', unitPrice: '0.07' });
+    const buckle = await add({ name: 'Buckle', unitPrice: '0.60' });
+    const dye = await add({ name: 'Dye', kind: 'supplies', unit: 'ml', unitPrice: '0.04' });
+    const hardware = [ring, buckle, dye].map((id) => ({ hardwareId: id, quantity: 130 }));
+    await owner().post('/api/receipts').send({ hardware }).expect(201);
+    await changePattern(() => ({
+      hardware: [
+        { hardwareId: ring, perPiece: 2, fromStep: 0 },
+        { hardwareId: buckle, perPiece: 1 },
+        { hardwareId: dye, perPiece: 1 },
+      ],
+    }));
+    const asked = { patternId: ready.patternId, quantity: 50, by: '2026-12-18' };
+    const check = await said([asked]);
+    const { cutCount } = check;
+    expect(cutCount).toBeGreaterThan(51);
+    const more = cutCount - 50;
+    expect(sentenceOf(check, 'Split ring')).toBe(
+      `Split ring: take ${2 * cutCount} of 130 free. ${2 * more} of the ${2 * cutCount} are for losses.`,
+    );
+    expect(sentenceOf(check, 'Buckle')).toBe('Buckle: take 50 of 130 free.');
+    expect(check).toMatchObject({
+      patternId: ready.patternId,
+      remarks: [
+        `${more} more pieces are cut than ordered, and no spares of Buckle are counted for them: the pattern does not say from when on it is needed. Lay some by, or say it on the pattern.`,
+      ],
+    });
+    const quote = await agreedQuote(ready, 50);
+    expect((await said([{ quoteId: quote.id }])).remarks).toEqual([
+      `${more} more pieces are cut than ordered, and no spares of Buckle are counted for them: the pattern as quoted does not say from when on it is needed. Lay some by. Say it on the pattern, and the next quote counts them.`,
+    ]);
+    const ticket = await ticketOf(ready, await takenOn(ready, 50, { evenIfShort: true }));
+    expect(ticket.hardware.find(({ name }) => name === 'Split ring')).toMatchObject({
+      needed: 2 * cutCount,
+      held: 2 * cutCount,
+    });
+    expect(await reservedOf(ring)).toBe(2 * cutCount);
+  });
+
+  it('has its allowance in every part of a kit, and no remark where nothing fails', async () => {
+    await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1, fromStep: 0 }] }));
+    const asked = { patternId: ready.patternId, quantity: 20, by: '2026-12-18' };
+    const check = await said([asked]);
+    for (const part of ['Cap 9 mm', 'Post 8 mm'])
+      expect(sentenceOf(check, part)).toContain(
+        ` ${check.cutCount - 20} of the ${check.cutCount} are for losses.`,
+      );
+    const work = { kind: 'minutesPer100', minutes: '60', rejectPercent: '0' };
+    await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1 }], work }));
+    expect((await said([asked])).remarks.join()).not.toContain('spares');
   });
 });
 

@@ -96,14 +96,24 @@ export function optionsOf(
   definition: PatternDefinition,
   kinds: Kinds,
 ): { name: string; hardware: RunHardware[] }[] {
-  return (definition.options ?? []).map(({ name, swaps }) => {
-    const out = new Set(swaps.map(({ hardwareId }) => hardwareId));
-    const stays = definition.hardware.filter(({ hardwareId }) => !out.has(hardwareId));
-    const comes = swaps.flatMap(({ hardwareId, byHardwareId, perPiece }) => {
-      if (byHardwareId === null) return [];
-      const before = definition.hardware.find((line) => line.hardwareId === hardwareId);
-      return [{ ...before, hardwareId: byHardwareId, perPiece }];
-    });
-    return { name, hardware: [...stays, ...comes].flatMap((line) => hardwareLine(kinds, line)) };
+  return (definition.options ?? []).map(({ name }) => ({
+    name,
+    hardware: linesWith(definition, name).flatMap((line) => hardwareLine(kinds, line)),
+  }));
+}
+
+/** The lines of hardware that a piece takes with an option of the pattern, or as it is. */
+export function linesWith(
+  { hardware, options = [] }: PatternDefinition,
+  name: string | null,
+): Line[] {
+  const swaps = options.find((option) => option.name === name)?.swaps ?? [];
+  const out = new Set(swaps.map(({ hardwareId }) => hardwareId));
+  const stays = hardware.filter(({ hardwareId }) => !out.has(hardwareId));
+  const comes = swaps.flatMap(({ hardwareId, byHardwareId, perPiece }) => {
+    if (byHardwareId === null) return [];
+    const before = hardware.find((line) => line.hardwareId === hardwareId);
+    return [{ ...before, hardwareId: byHardwareId, perPiece }];
   });
+  return [...stays, ...comes];
 }

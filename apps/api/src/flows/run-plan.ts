@@ -1,6 +1,7 @@
 import type { PatternDefinition } from '@hidewright/contract';
 import {
   benchMinutes,
+  hardwareOrdered,
   runNeeds,
   ticketSteps,
   toAtMost,
@@ -34,7 +35,8 @@ export interface RunPlan {
   patternId: number;
   leatherId: number;
   leatherAreaMm2: string;
-  hardware: { hardwareId: number; quantity: number }[];
+  /** With what of it the pieces ordered take where nothing is lost. */
+  hardware: { hardwareId: number; quantity: number; ordered: number }[];
   steps: PlannedStep[];
   plannedMinutes: Decimal;
   /** The same minutes with the waits between them, in hundredths of a minute. */
@@ -80,6 +82,7 @@ export function planOf(
   const { leatherId, hardware, needsDie, needsPlate } = definition;
   const run = runNeeds(input, quantity);
   const { cutCount, containers, leatherAreaMm2 } = run;
+  const ordered = hardwareOrdered(input, quantity);
   const steps = planSteps(input, { pieces: cutCount, containers });
   return {
     ...{ quantity, cutCount, containers, leatherAreaMm2, leatherId, needsDie, needsPlate },
@@ -89,6 +92,7 @@ export function planOf(
         // Quotes of before there were options have the pattern's hardware, line by line.
         hardwareId: line.hardwareId ?? (hardware[at]?.hardwareId as number),
         quantity: run.hardwareCounts[at] ?? 0,
+        ordered: ordered[at] ?? 0,
       })),
     ),
     plannedMinutes: steps.reduce((sum, step) => sum.plus(step.plannedMinutes), new Decimal(0)),

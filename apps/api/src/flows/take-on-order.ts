@@ -83,7 +83,7 @@ const toEstimate = ({ input, leatherId, leatherAreaMm2, hardware }: RunPlan): Jo
   input,
   leatherId,
   leatherAreaMm2,
-  hardware,
+  hardware: hardware.map(({ hardwareId, quantity }) => ({ hardwareId, quantity })),
 });
 
 async function makeOrder(

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { costRun } from './cost-run.ts';
+import { hardwareOrdered, lossesUnsaid } from './hardware-counts.ts';
 import type { RunInput } from './run-input.ts';
 
 const step = (name: string, secondsPerUnit: string, rejectPercent: string, more = {}) => ({
@@ -43,6 +44,13 @@ describe('what a run costs', () => {
       Math.ceil(cutCount * 0.9) * 2,
       Math.ceil((cutCount * 2) / 0.96),
     ]);
+    expect(hardwareOrdered({ ...run, hardware: [rivet, atRiveting, atStriking] }, 100)).toEqual([
+      200, 200, 200,
+    ]);
+    const spoiled = { ...rivet, lossPercent: '4' };
+    expect(
+      [rivet, atStriking, spoiled, { ...rivet, per: 'run' as const }].map(lossesUnsaid),
+    ).toEqual([true, false, false, false]);
   });
 
   it('counts what is kept in stock by the hundred and for the run too, in whole units', () => {

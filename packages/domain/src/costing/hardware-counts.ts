@@ -20,6 +20,16 @@ export function hardwareCounts(input: RunInput, quantity: number, cut: number): 
   });
 }
 
+/** Units of each line for the pieces ordered alone, as if none were lost: what is counted beyond them is for losses. */
+export function hardwareOrdered({ hardware }: RunInput, quantity: number): number[] {
+  return hardware.map((line) => upToWhole(unitsFor(line, quantity)).toNumber());
+}
+
+/** Whether nothing can be counted for losses, since nobody said which pieces need it nor how much of it is spoiled. */
+export function lossesUnsaid({ per = 'piece', fromStep, lossPercent }: RunHardware): boolean {
+  return per === 'piece' && typeof fromStep !== 'number' && new Exact(lossPercent ?? '0').isZero();
+}
+
 /** Units that so many pieces need before any is lost, with its fraction: 250 pieces at 2 for 100 need 5. */
 export function unitsFor(
   { perPiece, per = 'piece' }: Pick<RunHardware, 'perPiece' | 'per'>,

@@ -1,6 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { kitSettingFaults, settingFaults, type Setting, type Stack } from './post-fit.ts';
+import {
+  kitSettingFaults,
+  kitStackFaults,
+  lacksDie,
+  settingFaults,
+  type Setting,
+  type Stack,
+} from './post-fit.ts';
 
 const rivet: Setting = {
   postLengthMm: '8',
@@ -50,6 +57,9 @@ describe('a post against the folded stack', () => {
     const part = { ...rivet, name: 'Post 8 mm' };
     const faults = kitSettingFaults(kit, [part], { ...twoOf5to6, layers: null });
     expect(faults).toEqual([`Post 8 mm: ${settingFaults(rivet, twoOf5to6)[0]}`]);
+    const dieless = { ...kit, settingDie: 'SD-9', settingDieHere: false };
+    expect([lacksDie(dieless), lacksDie(kit)]).toEqual([true, false]);
+    expect(kitStackFaults(dieless, [part], { ...twoOf5to6, layers: null })).toEqual(faults);
   });
 
   it('is found sound exactly where the whole stack lies within what it holds', () => {

@@ -46,11 +46,30 @@ export function kitSettingFaults(
   parts: readonly (Setting & { name: string })[],
   stack: Stack,
 ): string[] {
-  const ofParts = parts.flatMap((part) =>
-    settingFaults(part, stack).map((fault) => `${part.name}: ${fault}`),
-  );
-  return [...settingFaults(kit, stack), ...ofParts];
+  return throughKit(kit, parts, (setting) => settingFaults(setting, stack));
 }
+
+/** Of a kit, what does not fit the folded stack alone, whatever dies are in the shop. @throws InvalidInput */
+export function kitStackFaults(
+  kit: Setting,
+  parts: readonly (Setting & { name: string })[],
+  stack: Stack,
+): string[] {
+  return throughKit(kit, parts, (setting) => stackFaults(setting, stack));
+}
+
+function throughKit(
+  kit: Setting,
+  parts: readonly (Setting & { name: string })[],
+  faultsOf: (setting: Setting) => string[],
+): string[] {
+  const ofParts = parts.flatMap((part) => faultsOf(part).map((fault) => `${part.name}: ${fault}`));
+  return [...faultsOf(kit), ...ofParts];
+}
+
+/** Whether the die that sets it is needed and not in the shop. */
+export const lacksDie = ({ settingDie, settingDieHere }: Setting): boolean =>
+  settingDie !== '' && !settingDieHere;
 
 function stackFaults(setting: Setting, stack: Stack): string[] {
   const { weightLowOz, weightHighOz } = stack;
@@ -100,10 +119,10 @@ function verdictOn(
   return null;
 }
 
-function dieFaults({ settingDie, settingDieHere }: Setting): string[] {
-  if (settingDie === '' || settingDieHere) return [];
-  return [`It is set with the die ${settingDie}, which is not in the shop.`];
-}
+const dieFaults = (setting: Setting): string[] =>
+  lacksDie(setting)
+    ? [`It is set with the die ${setting.settingDie}, which is not in the shop.`]
+    : [];
 
 /** 4 to 4.8, or one figure where both are the same. */
 function rangeText(low: Decimal, high: Decimal, places: number): string {

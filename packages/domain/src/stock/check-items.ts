@@ -1,5 +1,5 @@
 import type { Day } from '../promise/day.ts';
-import type { Sourcing, ItemStock } from './check-stock.ts';
+import type { HardwareNeed, ItemStock, Sourcing } from './check-stock.ts';
 import {
   type Dated,
   type Drawn,
@@ -29,6 +29,8 @@ export interface Standing {
 
 export interface ItemFacts extends Standing {
   item: ItemStock;
+  /** of what is needed, what is counted for pieces that fail and hardware that is spoiled */
+  forLosses: number;
   /** what could be taken for the pieces that are short, and is offered for nothing else; nobody has decided it */
   couldStandIn: { name: string; quantity: number }[];
 }
@@ -73,14 +75,14 @@ function comingWith({ receipts }: PromisePool, { now, inTime, later }: Drawn, da
 
 export function drawItem(
   item: ItemStock,
-  quantity: number,
+  { quantity, ordered = quantity }: HardwareNeed,
   { day, today }: Pick<Asked, 'day' | 'today'>,
 ): { facts: ItemFacts; left: ItemStock } {
   const { pool, buying } = item;
   const { standing, left } = drawOrMend({ pool, buying, needed: quantity, day, today });
   const bought = item.fromCustomer ? { ...standing, buy: 0, drafted: 0 } : standing;
   return {
-    facts: { ...bought, item, couldStandIn: [] },
+    facts: { ...bought, item, forLosses: quantity - ordered, couldStandIn: [] },
     left: { ...item, pool: left, buying: lessDrafted(buying, bought.drafted) },
   };
 }

@@ -197,6 +197,20 @@ describe('Can we make it?', () => {
     );
   });
 
+  it('says how much of what is needed is for losses', () => {
+    const hardware = [{ hardwareId: 7, quantity: 64, ordered: 60 }];
+    const [facts] = checkRuns(shop(), [run(60, '2026-12-10', { hardware })]);
+    expect(hardwareWords(facts!.items[0]!, say)).toBe(
+      'Rivet: take 64 of 300 free. 4 of the 64 are for losses.',
+    );
+    const theirs = shop({ items: [rivets(63, { fromCustomer: true, buying: nobody })] });
+    const one = [{ hardwareId: 7, quantity: 64, ordered: 63 }];
+    const [asked] = checkRuns(theirs, [run(60, '2026-12-10', { hardware: one })]);
+    expect(hardwareWords(asked!.items[0]!, say)).toBe(
+      'Rivet, from the customer: 64 needed, 63 here, 1 missing. 1 of the 64 is for losses. Ask the customer for it, and receive it here.',
+    );
+  });
+
   it('keeps what is promised to other jobs', () => {
     const promised = [{ day: '2026-12-15', quantity: 250 }];
     const stock = shop({ items: [rivets(300, { pool: { free: 300, receipts: [], promised } })] });

@@ -109,10 +109,10 @@ function leatherOf({ leathers }: ShopStock, { leather }: RunNeeds): LeatherStock
 
 function drawItems(shop: ShopStock, run: RunNeeds, when: { day: Day; today: Day }) {
   let itemsLeft: readonly ItemStock[] = shop.items;
-  const items = run.hardware.map(({ hardwareId, quantity }) => {
-    const item = itemsLeft.find((each) => each.hardwareId === hardwareId);
+  const items = run.hardware.map((need) => {
+    const item = itemsLeft.find(({ hardwareId }) => hardwareId === need.hardwareId);
     if (item === undefined) throw new InvalidInput('hardware', 'Choose hardware that is there.');
-    const { facts, left } = drawItem(item, quantity, when);
+    const { facts, left } = drawItem(item, need, when);
     itemsLeft = itemsLeft.map((each) => (each === item ? left : each));
     return facts;
   });

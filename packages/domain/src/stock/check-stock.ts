@@ -97,12 +97,21 @@ export interface LeatherNeed {
 }
 
 export interface ToolNeed {
-  /** Cutting die, Stamp plate */
+  /** Cutting die, Stamp plate, Setting die SD-9 */
   word: string;
   /** those on the rack that serve, the fittest first */
   choices: readonly number[];
   /** what to do where none is here */
   otherwise: string;
+  /** of a setting die, the hardware that it sets */
+  setsHardwareId?: number | undefined;
+}
+
+export interface HardwareNeed {
+  hardwareId: number;
+  quantity: number;
+  /** of it, what the pieces ordered take where nothing is lost; all of it where nobody said */
+  ordered?: number;
 }
 
 /** What one run asks for. */
@@ -112,7 +121,7 @@ export interface RunNeeds {
   /** pieces to cut */
   pieces: number;
   leather: LeatherNeed;
-  hardware: readonly { hardwareId: number; quantity: number }[];
+  hardware: readonly HardwareNeed[];
   tools: readonly ToolNeed[];
   /** bench time in hundredths of a minute, and the same with the waits between steps */
   minutes: number;

@@ -24,17 +24,29 @@ export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): strin
   const { needed, now, free, short } = standing;
   const pieces = countedIn(item);
   if (item.fromCustomer) return customerWords({ item, ...standing }, say);
+  const losses = lossWords({ item, ...standing });
   if (short === 0) {
-    if (now === needed) return `${item.name}: take ${pieces(needed)} of ${pieces(free)} free.`;
-    return `${item.name}: ${pieces(now)} of ${pieces(needed)} are free now. The rest ${comes(standing, say)}, in time.`;
+    const take =
+      now === needed
+        ? `${item.name}: take ${pieces(needed)} of ${pieces(free)} free.`
+        : `${item.name}: ${pieces(now)} of ${pieces(needed)} are free now. The rest ${comes(standing, say)}, in time.`;
+    return [take, ...losses].join(' ');
   }
   const head = `${item.name}: ${pieces(needed)} needed, ${pieces(free)} free, ${pieces(short)} short.`;
   const missing = standing.buy - standing.drafted;
   return [
     head,
+    ...losses,
     ...remedy(standing, item.buying, missing > 0 ? buyWords(item, missing) : null, say),
     ...standInWords({ item, ...standing }),
   ].join(' ');
+}
+
+/** "36 of the 236 are for losses." */
+function lossWords({ item, needed, forLosses }: ItemFacts): string[] {
+  if (forLosses === 0) return [];
+  const are = forLosses === 1 ? 'is' : 'are';
+  return [`${countedIn(item)(forLosses)} of the ${countWords(needed)} ${are} for losses.`];
 }
 
 const countedIn =
@@ -60,14 +72,17 @@ function customerWords({ item, ...standing }: ItemFacts, say: Say): string {
   const { needed, now, short } = standing;
   const counted = countedIn(item);
   const head = `${item.name}, from the customer:`;
+  const losses = lossWords({ item, ...standing });
   if (short === 0) {
-    return now === needed
-      ? `${head} ${counted(needed)} of theirs are here.`
-      : `${head} ${counted(now)} of ${counted(needed)} are here. The rest ${comes(standing, say)}, in time.`;
+    const here =
+      now === needed
+        ? `${head} ${counted(needed)} of theirs are here.`
+        : `${head} ${counted(now)} of ${counted(needed)} are here. The rest ${comes(standing, say)}, in time.`;
+    return [here, ...losses].join(' ');
   }
   const missing = `${head} ${counted(needed)} needed, ${counted(now)} here, ${counted(short)} missing.`;
   const ask = `Ask the customer for ${short === 1 ? 'it' : 'them'}, and receive ${short === 1 ? 'it' : 'them'} here.`;
-  return [missing, ask, ...standInWords({ item, ...standing })].join(' ');
+  return [missing, ...losses, ask, ...standInWords({ item, ...standing })].join(' ');
 }
 
 /** "12 Brass ring 16 mm can stand in for 12 of the 20 that are short." */

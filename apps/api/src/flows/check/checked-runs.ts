@@ -8,12 +8,15 @@ import { loadShopStock } from './load-shop-stock.ts';
 import { needsOf, toolsOf, toToolStock } from './needs-of-runs.ts';
 import type { OwedToJobs } from './owed-to-jobs.ts';
 import { pressForCheck } from './press-for-check.ts';
+import { settingOf } from './setting-for-check.ts';
 import type { PlannedRun } from './runs-asked.ts';
 
 export interface CheckedRun {
   planned: PlannedRun;
   facts: RunFacts;
   press: CheckAnswer | null;
+  /** What of its hardware does not fit the folded leather, in sentences. */
+  misfits: string[];
   /** What lies finished already, in words. */
   finished: string[];
 }
@@ -36,8 +39,12 @@ export async function checkPlanned(
   const rows = await freeLotRows(em, leatherIds);
   const { stock, owed } = await loadShopStock(work, { leatherIds, hardwareIds }, rows);
   const tools = await inTurn(planned, (run) => toolsOf(em, run));
+  const settings = await settingOf(em, planned);
   const needs = await inTurn(planned, (run, at) =>
-    needsOf(em, run, { rows, tools: tools[at] ?? { needs: [], tools: [] } }),
+    needsOf(em, run, {
+      rows,
+      tools: [...(tools[at]?.needs ?? []), ...(settings[at]?.dies ?? [])],
+    }),
   );
   const shop = { ...stock, tools: once(tools.flatMap((each) => each.tools)).map(toToolStock) };
   const facts = checkRuns(shop, needs);
@@ -46,6 +53,7 @@ export async function checkPlanned(
     planned: run,
     facts: facts[at] as RunFacts,
     press: await pressForCheck(em, run, tools[at]?.tools ?? []),
+    misfits: settings[at]?.misfits ?? [],
     finished: finishedWords(there, run),
   }));
   return { shop, owed, runs };

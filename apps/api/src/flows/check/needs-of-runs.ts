@@ -21,7 +21,7 @@ export interface NeededTools {
 export async function needsOf(
   em: EntityManager,
   run: PlannedRun,
-  { rows, tools }: { rows: readonly LotRow[]; tools: NeededTools },
+  { rows, tools }: { rows: readonly LotRow[]; tools: readonly ToolNeed[] },
 ): Promise<RunNeeds> {
   const { plan, by, definition, sides } = run;
   const { pieces, containerAreaMm2 } = plan.input.layout;
@@ -39,7 +39,7 @@ export async function needsOf(
       likeShade: await earlierShade(em, run),
     },
     hardware: plan.hardware,
-    tools: tools.needs,
+    tools,
     minutes: scaled(plan.plannedMinutes, 2),
     parts: plan.parts,
   };

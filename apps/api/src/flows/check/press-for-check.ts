@@ -62,6 +62,7 @@ function toAnswer(
   return {
     about: 'press',
     name: press.name,
+    hardwareId: null,
     unit: 'mm',
     needed: text(rule.asked),
     freeNow: text(rule.manages),

@@ -20,6 +20,7 @@ import { sayDay } from '../../modules/quotes/say-day.ts';
 import { sayRackArea } from '../../modules/stock/say-area.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { CheckedRun } from './checked-runs.ts';
+import { patternRemarks } from './pattern-remarks.ts';
 
 /** How this shop says areas and days. */
 export async function sayFor(em: EntityManager): Promise<Say> {
@@ -28,7 +29,10 @@ export async function sayFor(em: EntityManager): Promise<Say> {
 }
 
 /** Every question answered, with what to take or what mends it. */
-export function runReply({ planned, facts, press, finished }: CheckedRun, say: Say): RunCheck {
+export function runReply(
+  { planned, facts, press, misfits, finished }: CheckedRun,
+  say: Say,
+): RunCheck {
   const { plan, by } = planned;
   const answers = [
     leatherAnswer(facts.leather, say),
@@ -46,6 +50,8 @@ export function runReply({ planned, facts, press, finished }: CheckedRun, say: S
     yes: answers.every(({ enough }) => enough),
     answers,
     lots: facts.leather.takes.map(toLot),
+    patternId: plan.patternId,
+    remarks: patternRemarks({ planned, facts, misfits }),
     notes: [...finished, ...notesOn(planned)],
     earliestDay: facts.earliest,
   };
@@ -83,6 +89,7 @@ function leatherAnswer(facts: LeatherFacts, say: Say): CheckAnswer {
     ...figures(facts.standing, area),
     about: 'leather',
     name,
+    hardwareId: null,
     unit: 'mm2',
     enough: facts.piecesShort === 0,
     sentence: leatherWords(facts, say),
@@ -90,9 +97,9 @@ function leatherAnswer(facts: LeatherFacts, say: Say): CheckAnswer {
 }
 
 function itemAnswer(facts: ItemFacts, say: Say): CheckAnswer {
-  const { name, kind } = facts.item;
+  const { name, kind, hardwareId } = facts.item;
   const sentence = hardwareWords(facts, say);
-  return { ...figures(facts, String), about: kind, name, unit: 'piece', sentence };
+  return { ...figures(facts, String), about: kind, name, hardwareId, unit: 'piece', sentence };
 }
 
 function toolAnswer(facts: ToolFacts): CheckAnswer {
@@ -101,6 +108,7 @@ function toolAnswer(facts: ToolFacts): CheckAnswer {
   return {
     about: 'tooling',
     name: tool?.name ?? need.word,
+    hardwareId: need.setsHardwareId ?? null,
     unit: 'strike',
     needed: String(strikesNeeded),
     freeNow: String(left),
@@ -118,6 +126,7 @@ function hoursAnswer(facts: HoursFacts, say: Say): CheckAnswer {
   return {
     about: 'hours',
     name: 'Bench hours',
+    hardwareId: null,
     unit: 'minute',
     needed: text(facts.needed),
     freeNow: text(facts.free),

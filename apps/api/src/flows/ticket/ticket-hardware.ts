@@ -3,7 +3,7 @@ import type { StandInStock } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { Hardware } from '../../modules/hardware/hardware.entity.ts';
 import { readStandIns } from '../check/stand-ins-for-check.ts';
-import { balancesByItem, type JobStock } from './ticket-stock.ts';
+import { balancesByItem, nothingThere, type JobStock } from './ticket-stock.ts';
 
 interface TicketHardware {
   hardware: JobHardware[];
@@ -30,7 +30,7 @@ export async function ticketHardware(
     unit,
     needed: needed.get(id) ?? 0,
     held: stock.held({ hardwareId: id }),
-    ...(balances.get(`hardware ${id}`) ?? { onHand: 0, free: 0, missing: 0 }),
+    ...(balances.get(`hardware ${id}`) ?? nothingThere),
     taken: stock.taken({ hardwareId: id }),
     standsInFor: lines.flatMap((line) => inPlaceOf(line, { id, name }, standIns.of(line.id))),
   }));

@@ -65,15 +65,17 @@ export async function ticketLots(
       widthMm: lot.widthMm?.toString() ?? null,
       heightMm: lot.heightMm?.toString() ?? null,
       held: stock.held({ lotId: lot.id }),
-      free: balances.get(`lot ${lot.id}`)?.free ?? 0,
+      ...(balances.get(`lot ${lot.id}`) ?? nothingThere),
       taken: stock.taken({ lotId: lot.id }),
     }))
     .filter(({ held, free, taken }) => held > 0 || free > 0 || taken > 0)
     .sort((a, b) => b.held - a.held || b.taken - a.taken);
   const mixes = await mixesOf(em, rows);
-  return rows.map(({ held, free, taken, ...lot }) => ({
+  return rows.map(({ held, onHand, missing, free, taken, ...lot }) => ({
     ...lot,
     heldAreaMm2: areaText(held),
+    onHandAreaMm2: areaText(onHand),
+    missingAreaMm2: areaText(missing),
     freeAreaMm2: areaText(free),
     takenAreaMm2: areaText(taken),
     mix: mixes.get(lot.lotId) ?? null,
@@ -89,6 +91,8 @@ interface Balance {
   /** Held and not there. */
   missing: number;
 }
+
+export const nothingThere: Balance = { onHand: 0, free: 0, missing: 0 };
 
 /** What there is of each, by `lot 7` or `hardware 3`. */
 export async function balancesByItem(

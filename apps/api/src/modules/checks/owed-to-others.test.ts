@@ -1,3 +1,4 @@
+import { Decimal } from 'decimal.js';
 import { afterEach, beforeEach, expect, it } from 'vitest';
 import type { RunsCheck, StockLevels } from '@hidewright/contract';
 import {
@@ -84,6 +85,21 @@ it('what was held and is not there is owed to the job that goes without', async 
   expect(rivets?.why).toMatch(/^50 missing for J-0001 [^.]+\. None free, below /);
   await awaitRivets(100, '2026-12-08');
   expect(await foundBy('2026-12-30')).toMatchObject({ free: '50', short: '50' });
+});
+
+it('the ticket says what of a lot that is held a count did not find', async () => {
+  const { job } = await takenOn(ready, 50);
+  const lot = async () => (await maker().get(`/api/jobs/${job.id}`).expect(200)).body.lots[0];
+  const { heldAreaMm2, onHandAreaMm2, missingAreaMm2 } = await lot();
+  expect([Number(onHandAreaMm2) > Number(heldAreaMm2), missingAreaMm2]).toEqual([true, '0']);
+  const looked = { of: 'lot', lotId: ready.lotId, areaMm2: '200000', reason: 'measured again' };
+  await owner().post('/api/adjustments').send(looked).expect(201);
+  expect(await lot()).toMatchObject({
+    heldAreaMm2,
+    onHandAreaMm2: '200000',
+    missingAreaMm2: new Decimal(heldAreaMm2).minus(200_000).toString(),
+    freeAreaMm2: '0',
+  });
 });
 
 it('a job taken on needs its hardware when it must be begun, not when it is due', async () => {

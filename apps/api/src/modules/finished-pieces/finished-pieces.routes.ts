@@ -53,7 +53,7 @@ export function finishedPieceRoutes(context: Context): Router {
 
   serve(router, context, takeFinished, async (work, { params, body }) => {
     const piece = await findFinished(work.em, params.id);
-    if (body.as === 'sold') await requireMarkOf(work.em, piece, body.customerId);
+    if (body.as !== 'spoiled') await requireMarkOf(work.em, piece, body.customerId);
     await takeFinishedPieces(work, piece, body);
     const words = { sold: 'sold', given: 'gave away', spoiled: 'wrote off' };
     return told(work, piece.id, (of) => `${words[body.as]} ${body.quantity} of ${of}`, body);

@@ -158,7 +158,9 @@ describe('pieces on the shelf', () => {
     const sold = await take({ as: 'sold', ...buyer, quantity: 1, reason: 'at the market' });
     expect(sold.status).toBe(201);
     expect(sold.body).toMatchObject({ onHand: 2 });
-    await take({ as: 'given', quantity: 1, reason: 'sample for Tern Street' }).expect(201);
+    await take({ as: 'given', ...buyer, quantity: 1, reason: 'sample for Tern Street' }).expect(
+      201,
+    );
     await take({ as: 'spoiled', quantity: 1, reason: 'fell into dye' }).expect(201);
     expect(await kind('good')).toMatchObject({ onHand: 0, value: '0.00', valueEach: null });
     const all = await movements(id);
@@ -173,24 +175,27 @@ describe('pieces on the shelf', () => {
     expect(log.map(({ action }) => action)).toContain('gave away 1 of Round coaster');
   });
 
-  it('with a customer’s mark are sold over the counter to that customer alone', async () => {
-    await finish(52, 0);
+  it('with a customer’s mark are sold or given to that customer alone', async () => {
+    await finish(53, 0);
     const { id } = await kind('good');
-    const sell = (customerId?: number) =>
+    const take = (as: string, customerId?: number) =>
       post(
         `finished-pieces/${id}/takings`,
-        { as: 'sold', quantity: 1, reason: 'walk-in', customerId },
+        { as, quantity: 1, reason: 'walk-in', customerId },
         'maker',
       );
     const { name } = ready.customer;
-    const message = `These bear the mark of ${name}, and are sold to nobody else. Choose ${name}.`;
-    for (const buyer of [undefined, 999])
-      expect((await sell(buyer).expect(422)).body.errors).toEqual([
-        { field: 'customerId', message },
-      ]);
-    expect(await kind('good')).toMatchObject({ onHand: 2 });
-    await sell(ready.customer.id).expect(201);
-    expect(await kind('good')).toMatchObject({ onHand: 1 });
+    const message = `These bear the mark of ${name}, and go to nobody else. Choose ${name}.`;
+    for (const as of ['sold', 'given'])
+      for (const somebody of [undefined, 999])
+        expect((await take(as, somebody).expect(422)).body.errors).toEqual([
+          { field: 'customerId', message },
+        ]);
+    expect(await kind('good')).toMatchObject({ onHand: 3 });
+    await take('sold', ready.customer.id).expect(201);
+    await take('given', ready.customer.id).expect(201);
+    await take('spoiled').expect(201);
+    expect(await kind('good')).toMatchObject({ onHand: 0 });
   });
 
   it('are counted, at what those beside them cost or the last did', async () => {

@@ -247,7 +247,7 @@ describe('a sale that cannot be', () => {
       {
         field: 'customerId',
         message:
-          'These bear the mark of Brambling Brewery, and are sold to nobody else. Choose Brambling Brewery.',
+          'These bear the mark of Brambling Brewery, and go to nobody else. Choose Brambling Brewery.',
       },
     ]);
     await sell({ customerId: ready.customer.id, quantity: 1 }, marked.id).expect(201);

@@ -15,6 +15,8 @@ export async function kitsAmong(
 interface Counted {
   hardwareId: number;
   quantity: number;
+  /** Of it, what the pieces ordered take where nothing is lost. */
+  ordered: number;
 }
 
 /** Counts of hardware with every kit as its parts, each kind once: what is really taken from the shelf. */
@@ -27,12 +29,13 @@ export async function throughKits(
     counted.map(({ hardwareId }) => hardwareId),
   );
   return summed(
-    counted.flatMap(({ hardwareId, quantity }) => {
-      const parts = kits.get(hardwareId);
-      if (parts === undefined) return [{ hardwareId, quantity }];
+    counted.flatMap((line) => {
+      const parts = kits.get(line.hardwareId);
+      if (parts === undefined) return [line];
       return parts.map((part) => ({
         hardwareId: part.hardwareId,
-        quantity: part.quantity * quantity,
+        quantity: part.quantity * line.quantity,
+        ordered: part.quantity * line.ordered,
       }));
     }),
   );
@@ -40,8 +43,12 @@ export async function throughKits(
 
 /** Each kind once, with all that is counted of it. */
 export function summed(counted: readonly Counted[]): Counted[] {
-  const sums = new Map<number, number>();
-  for (const { hardwareId, quantity } of counted)
-    sums.set(hardwareId, (sums.get(hardwareId) ?? 0) + quantity);
-  return [...sums].map(([hardwareId, quantity]) => ({ hardwareId, quantity }));
+  const sums = new Map<number, Counted>();
+  for (const { hardwareId, quantity, ordered } of counted) {
+    const sum = sums.get(hardwareId) ?? { hardwareId, quantity: 0, ordered: 0 };
+    sum.quantity += quantity;
+    sum.ordered += ordered;
+    sums.set(hardwareId, sum);
+  }
+  return [...sums.values()];
 }

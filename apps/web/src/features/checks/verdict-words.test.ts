@@ -6,6 +6,7 @@ const answer = (about: CheckAnswer['about'], enough: boolean): CheckAnswer => ({
   about,
   enough,
   name: '',
+  hardwareId: null,
   unit: 'piece',
   needed: '1',
   freeNow: '1',
@@ -51,6 +52,7 @@ describe('the verdict in words', () => {
   it('says whether a yes counts on what is yet to come', () => {
     const run = {
       ...{ quantity: 1, cutCount: 1, containers: 1, yes: true, lots: [], notes: [] },
+      ...{ patternId: 1, remarks: [] },
       ...{ by: '2026-12-10', startBy: '2026-12-09', earliestDay: '2026-12-09' },
     };
     const said = (freeNow: string) =>

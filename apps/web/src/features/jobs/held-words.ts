@@ -1,9 +1,15 @@
-import type { JobHardware } from '@hidewright/contract';
+interface Held {
+  held: number;
+  /** in all, for whomever */
+  onHand: number;
+  /** held for jobs and not there */
+  missing: number;
+}
 
-/** What a job holds of a thing; where a count found less than is held, how much of it is there. */
+/** What a job holds of a thing; where less is there than is held, how much of it is. */
 export function heldWords(
-  { held, onHand, missing }: Pick<JobHardware, 'held' | 'onHand' | 'missing'>,
-  say: (count: number) => string,
+  { held, onHand, missing }: Held,
+  say: (amount: number) => string,
 ): string {
   if (missing === 0) return `${say(held)} held`;
   if (onHand < held)

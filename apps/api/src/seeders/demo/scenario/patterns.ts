@@ -9,7 +9,7 @@ interface NamedOption {
 
 type Named = Omit<PatternDefinition, 'leatherId' | 'hardware' | 'options' | 'history'> & {
   leather: LeatherName;
-  hardware: { name: HardwareName; perPiece: number; per?: 'hundred' }[];
+  hardware: { name: HardwareName; perPiece: number; per?: 'hundred'; fromStep?: number }[];
   options?: NamedOption[];
 };
 
@@ -84,7 +84,8 @@ export const patterns = [
       leather: 'Oak tan russet 5–6 oz',
       hardware: [
         { name: 'Buckles 20 mm, solid brass', perPiece: 1 },
-        { name: 'Rivets 7 mm, antique brass', perPiece: 2 },
+        // Set at Fold and rivet: a tag that fails then has used them up.
+        { name: 'Rivets 7 mm, antique brass', perPiece: 2, fromStep: 3 },
         { name: 'Edge dye, dark brown', perPiece: 45, per: 'hundred' },
       ],
       options: [

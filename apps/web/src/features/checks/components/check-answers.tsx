@@ -1,9 +1,10 @@
 import type { CheckAnswer, RunCheck } from '@hidewright/contract';
+import { Notice } from '../../../components/notice.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 
 /** Each answer in a sentence, and the lots to go to; where something is short, with the way to put it right. */
-export function CheckAnswers({ check }: { check: Pick<RunCheck, 'answers' | 'lots' | 'notes'> }) {
+export function CheckAnswers({ check }: { check: RunCheck }) {
   return (
     <>
       <ul className="my-4 divide-y divide-stitch/60" aria-label="Answers">
@@ -14,18 +15,34 @@ export function CheckAnswers({ check }: { check: Pick<RunCheck, 'answers' | 'lot
                 {answer.enough ? 'enough' : 'short'}
               </StateMark>
               <span className="min-w-0 grow basis-64">{answer.sentence}</span>
-              {!answer.enough && <Remedy about={answer.about} />}
+              {!answer.enough && <Remedy answer={answer} />}
             </div>
             {answer.about === 'leather' && <Lots lots={check.lots} />}
           </li>
         ))}
       </ul>
+      <PatternRemarks check={check} />
       {check.notes.map((note) => (
         <p key={note} className="mb-2 text-ink-soft">
           {note}
         </p>
       ))}
     </>
+  );
+}
+
+function PatternRemarks({ check: { remarks, patternId } }: { check: RunCheck }) {
+  if (remarks.length === 0) return null;
+  return (
+    <Notice
+      tone="attention"
+      className="mb-4"
+      actions={<TextLink to={`/pattern-room/patterns/${patternId}`}>Pattern</TextLink>}
+    >
+      {remarks.map((remark) => (
+        <p key={remark}>{remark}</p>
+      ))}
+    </Notice>
   );
 }
 
@@ -44,16 +61,17 @@ function Lots({ lots }: Pick<RunCheck, 'lots'>) {
   );
 }
 
-const remedies: Record<CheckAnswer['about'], { to: string; word: string } | null> = {
+/** Where what is no hardware is put right. */
+const remedies: Partial<Record<CheckAnswer['about'], { to: string; word: string }>> = {
   leather: { to: '/stockroom', word: 'Stockroom' },
-  hardware: { to: '/stockroom/hardware', word: 'Stockroom' },
-  supplies: { to: '/stockroom/hardware', word: 'Stockroom' },
   tooling: { to: '/pattern-room', word: 'Pattern room' },
-  press: null,
   hours: { to: '/bench', word: 'Bench' },
 };
 
-function Remedy({ about }: { about: CheckAnswer['about'] }) {
-  const remedy = remedies[about];
+function Remedy({ answer: { about, hardwareId } }: { answer: CheckAnswer }) {
+  const remedy =
+    hardwareId === null
+      ? remedies[about]
+      : { to: `/stockroom/hardware/${hardwareId}`, word: 'Stockroom' };
   return remedy && <TextLink to={remedy.to}>{remedy.word}</TextLink>;
 }

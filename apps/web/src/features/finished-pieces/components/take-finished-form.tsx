@@ -8,21 +8,20 @@ import { countText } from '../../../lib/formatting.ts';
 import { movedWords } from '../finished-words.ts';
 import { useTakeFinished } from '../finished-pieces.mutations.ts';
 
-const waysOf = ({ customerName }: FinishedPiece) => [
-  soldTo(customerName),
-  { value: 'given', label: 'Given away' },
-  { value: 'spoiled', label: 'Spoiled' },
-];
-
-/** Pieces with a customer's mark are sold to that customer, whom the choice names. */
-const soldTo = (customerName: string | null) =>
-  customerName === null
-    ? { value: 'sold', label: 'Sold over the counter', detail: 'paid on the spot, no invoice' }
-    : {
-        value: 'sold',
-        label: `Sold over the counter to ${customerName}`,
-        detail: 'to nobody else, since they bear that mark; paid on the spot, no invoice',
-      };
+/** Pieces with a customer's mark go to that customer alone, whom the choices name. */
+const waysOf = ({ customerName }: FinishedPiece) => {
+  const alone =
+    customerName === null ? [] : [`to ${customerName} alone, since they bear that mark`];
+  return [
+    {
+      value: 'sold',
+      label: 'Sold over the counter',
+      detail: [...alone, 'paid on the spot, no invoice'].join('; '),
+    },
+    { value: 'given', label: 'Given away', detail: alone[0] },
+    { value: 'spoiled', label: 'Spoiled' },
+  ];
+};
 
 /** Takes pieces from the shelf, with a word on what became of them. */
 export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
@@ -35,7 +34,7 @@ export function TakeFinishedForm({ piece }: { piece: FinishedPiece }) {
       submitSize="bench"
       again
       onSend={async (body) => {
-        const customerId = body.as === 'sold' ? piece.customerId : null;
+        const customerId = body.as === 'spoiled' ? null : piece.customerId;
         const taken = { ...body, customerId };
         const now = await take.mutateAsync({ params: { id: piece.id }, body: taken });
         say(`${countText(body.quantity)} ${movedWords[body.as]}, ${countText(now.onHand)} left.`);

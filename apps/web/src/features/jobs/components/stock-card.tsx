@@ -210,11 +210,16 @@ function LotTitle({ lot }: { lot: JobLot }) {
   );
 }
 
-function lotLine(lot: JobLot, say: (areaMm2: string) => string): string {
+function lotLine(lot: JobLot, area: (areaMm2: string) => string): string {
+  const { heldAreaMm2, onHandAreaMm2, missingAreaMm2, takenAreaMm2, freeAreaMm2 } = lot;
   const parts = [];
-  if (lot.heldAreaMm2 !== '0') parts.push(`${say(lot.heldAreaMm2)} held`);
-  if (lot.takenAreaMm2 !== '0') parts.push(`${say(lot.takenAreaMm2)} taken`);
-  parts.push(lot.freeAreaMm2 === '0' ? 'nothing free' : `${say(lot.freeAreaMm2)} free`);
+  if (heldAreaMm2 !== '0') {
+    const [held, onHand] = [Number(heldAreaMm2), Number(onHandAreaMm2)];
+    const counted = { held, onHand, missing: Number(missingAreaMm2) };
+    parts.push(heldWords(counted, (mm2) => area(String(mm2))));
+  }
+  if (takenAreaMm2 !== '0') parts.push(`${area(takenAreaMm2)} taken`);
+  parts.push(freeAreaMm2 === '0' ? 'nothing free' : `${area(freeAreaMm2)} free`);
   return parts.join(' · ');
 }
 

@@ -34,7 +34,7 @@ export function MoreOfHardware({ at }: { at: number }) {
             key={choices.length}
             name={`${line}.fromStep`}
             label="Needed for"
-            placeholder="the pieces ordered"
+            placeholder="only the pieces ordered"
             choices={choices}
             help="Pieces that fail later have used it up."
           />
