@@ -31,6 +31,12 @@ export const supplierClaim = z
     sentBy: z.enum(['mail', 'hand']),
     openedAt: z.string(),
     credited: confidential(z.string().nullable()),
+    /** Each note of what was credited, first to last; a later one puts an earlier one right, and says why. */
+    credits: confidential(
+      z.array(
+        z.object({ credited: z.string(), reason: z.string(), at: z.string(), by: z.string() }),
+      ),
+    ),
     /** Why it was given up. */
     note: z.string(),
     closedAt: z.string().nullable(),
@@ -86,6 +92,9 @@ export const listClaims = endpoint({
   reply: z.object({ items: z.array(supplierClaim) }),
 });
 
+/** A credit above the claim, such as with freight; otherwise it is taken for a slip. */
+const moreThanClaimed = z.boolean().default(false);
+
 export const closeClaim = endpoint({
   method: 'PATCH',
   path: '/supplier-claims/{id}',
@@ -99,6 +108,7 @@ export const closeClaim = endpoint({
       z.strictObject({
         state: z.literal('credited'),
         credited: money.refine((text) => Number(text) > 0, 'Enter what was credited, above 0.'),
+        moreThanClaimed,
       }),
       z.strictObject({
         state: z.literal('given up'),
@@ -107,5 +117,20 @@ export const closeClaim = endpoint({
     ],
     'Say whether it was credited or is given up.',
   ),
+  reply: supplierClaim,
+});
+
+export const correctCredit = endpoint({
+  method: 'PATCH',
+  path: '/supplier-claims/{id}/credit',
+  summary: 'Put right what a claim was credited; 0 opens the claim again',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject({
+    credited: money,
+    moreThanClaimed,
+    reason: line(200, 'Say what was wrong, in a few words.'),
+  }),
   reply: supplierClaim,
 });

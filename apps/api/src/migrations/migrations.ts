@@ -18,6 +18,7 @@ import { TheShelfSales } from './migration-20261207-the-shelf-sales.ts';
 import { TheDays } from './migration-20261208-the-days.ts';
 import { TheChangedOrders } from './migration-20261209-the-changed-orders.ts';
 import { TheMarks } from './migration-20261209-the-marks.ts';
+import { TheCredits } from './migration-20261210-the-credits.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -41,4 +42,5 @@ export const migrations = [
   { name: 'migration-20261208-the-days', class: TheDays },
   { name: 'migration-20261209-the-changed-orders', class: TheChangedOrders },
   { name: 'migration-20261209-the-marks', class: TheMarks },
+  { name: 'migration-20261210-the-credits', class: TheCredits },
 ];

@@ -225,6 +225,11 @@ describe('verifying a data folder', () => {
       'short of their mark',
     ],
     [
+      'what a claim was credited',
+      `UPDATE supplier_claim SET state = 'credited', credited = 100, closed_at = opened_at`,
+      'noted of it last',
+    ],
+    [
       'leather that is out',
       'UPDATE stock_movement SET value = value - 1, quantity = quantity + 1000 WHERE purchase_line_id IS NOT NULL',
       'is out on a sent line',

@@ -33,6 +33,14 @@ interface LotRow {
   quantity: number;
 }
 
+interface CreditRow {
+  claim_id: number;
+  credited: number;
+  reason: string;
+  at: string;
+  actor_name: string;
+}
+
 interface Asked {
   id?: number | undefined;
   purchaseOrderId?: number | undefined;
@@ -58,11 +66,16 @@ export async function readClaimList(em: EntityManager, asked: Asked): Promise<Cl
      JOIN leather ON leather.id = lot.leather_id ${where} ORDER BY l.position`,
     values,
   );
+  const credits = await em.execute<CreditRow[]>(
+    `SELECT k.supplier_claim_id AS claim_id, k.* FROM claim_credit k
+     JOIN supplier_claim c ON c.id = k.supplier_claim_id ${where} ORDER BY k.id`,
+    values,
+  );
   return rows.map((row) =>
-    toReply(
-      row,
-      lots.filter((lot) => lot.claim_id === row.id),
-    ),
+    toReply(row, {
+      lots: lots.filter((lot) => lot.claim_id === row.id),
+      credits: credits.filter((credit) => credit.claim_id === row.id),
+    }),
   );
 }
 
@@ -76,7 +89,10 @@ export async function readOneClaim(em: EntityManager, id: number): Promise<Claim
 const areaText = (thousandths: number) => unscaled(thousandths, 3).toFixed();
 const amountText = (hundredths: number) => moneyText(unscaled(hundredths, 2));
 
-function toReply(row: Row, lots: LotRow[]): ClaimReply {
+function toReply(
+  row: Row,
+  { lots, credits }: { lots: LotRow[]; credits: CreditRow[] },
+): ClaimReply {
   return {
     id: row.id,
     purchaseOrderId: row.purchase_order_id,
@@ -98,6 +114,12 @@ function toReply(row: Row, lots: LotRow[]): ClaimReply {
     sentBy: row.sent_by,
     openedAt: row.opened_at,
     credited: row.credited === null ? null : amountText(row.credited),
+    credits: credits.map(({ credited, reason, at, actor_name: by }) => ({
+      credited: amountText(credited),
+      reason,
+      at,
+      by,
+    })),
     note: row.note,
     closedAt: row.closed_at,
     version: row.version,

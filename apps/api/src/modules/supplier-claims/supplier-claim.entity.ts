@@ -32,6 +32,7 @@ export class SupplierClaim {
   @Property({ type: 'text', columnType: 'text' })
   sentBy!: 'mail' | 'hand';
 
+  /** As it was noted last. */
   @Property({ type: MoneyType, nullable: true })
   credited: Decimal | null = null;
 

@@ -9,6 +9,7 @@ import { areaText, instantText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { claimsQuery } from '../purchase-orders.queries.ts';
 import { CloseClaimDialog } from './close-claim-dialog.tsx';
+import { CorrectCreditDialog } from './correct-credit-dialog.tsx';
 
 /** What was claimed on an order, and what became of it; nothing while nothing was. */
 export function ClaimsCard({ orderId, isOwner }: { orderId: number; isOwner: boolean }) {
@@ -29,7 +30,8 @@ export function ClaimsCard({ orderId, isOwner }: { orderId: number; isOwner: boo
 
 function Claim({ claim, isOwner }: { claim: SupplierClaim; isOwner: boolean }) {
   const { areaUnit, currency, timeZone } = useWorkshop();
-  const [closing, setClosing] = useState<'credited' | 'given up'>();
+  const [asking, setAsking] = useState<'credited' | 'given up' | 'put right'>();
+  const close = () => setAsking(undefined);
   const { missingAreaMm2, worth = '0', openedAt, sentBy } = claim;
   return (
     <div className="space-y-2">
@@ -50,19 +52,24 @@ function Claim({ claim, isOwner }: { claim: SupplierClaim; isOwner: boolean }) {
         {`Claimed ${instantText(openedAt, timeZone)} ${sentBy === 'mail' ? 'by e-mail' : 'by hand'}.`}{' '}
         <Outcome claim={claim} />
       </p>
+      <CreditsPutRight claim={claim} />
       <details>
         <summary className="rounded py-1">What was written</summary>
         <p className="mt-2 max-w-prose whitespace-pre-line">{claim.text}</p>
       </details>
       {isOwner && claim.state === 'open' && (
         <div className="flex flex-wrap gap-2">
-          <Button onClick={() => setClosing('credited')}>Note the credit</Button>
-          <Button onClick={() => setClosing('given up')}>Give it up</Button>
+          <Button onClick={() => setAsking('credited')}>Note the credit</Button>
+          <Button onClick={() => setAsking('given up')}>Give it up</Button>
         </div>
       )}
-      {closing && (
-        <CloseClaimDialog claim={claim} as={closing} onClose={() => setClosing(undefined)} />
+      {isOwner && claim.state === 'credited' && (
+        <Button onClick={() => setAsking('put right')}>Put the credit right</Button>
       )}
+      {(asking === 'credited' || asking === 'given up') && (
+        <CloseClaimDialog claim={claim} as={asking} onClose={close} />
+      )}
+      {asking === 'put right' && <CorrectCreditDialog claim={claim} onClose={close} />}
     </div>
   );
 }
@@ -72,4 +79,18 @@ function Outcome({ claim }: { claim: SupplierClaim }) {
   if (claim.state === 'credited')
     return `Credited: ${currency} ${moneyText(claim.credited ?? '0')}.`;
   return claim.state === 'given up' ? `Given up: ${claim.note}.` : 'No answer yet.';
+}
+
+/** Every note of a credit that was wrong, with why and what it was put right to. */
+function CreditsPutRight({ claim: { credits = [] } }: { claim: SupplierClaim }) {
+  const { currency, timeZone } = useWorkshop();
+  const amount = (text: string | undefined) => `${currency} ${moneyText(text ?? '0')}`;
+  return credits.map(
+    ({ credited, reason, at, by }, index) =>
+      reason !== '' && (
+        <p key={at} className="text-sm text-ink-soft">
+          {`Put right from ${amount(credits[index - 1]?.credited)} to ${amount(credited)}: ${reason} (${by}, ${instantText(at, timeZone)})`}
+        </p>
+      ),
+  );
 }
