@@ -1,3 +1,4 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
@@ -15,17 +16,33 @@ const claimedLot = z.object({
   measuredAreaMm2: z.string(),
 });
 
+/** What went back to its supplier: of a lot an area, of hardware a count. */
+const sentBack = z.object({
+  on: z.string(),
+  lotId: id.nullable(),
+  lotTag: z.string().nullable(),
+  hardwareId: id.nullable(),
+  /** Of the leather, or of the hardware. */
+  name: z.string(),
+  unit: z.enum(hardwareUnits).nullable(),
+  areaMm2: z.string().nullable(),
+  quantity: z.int().nullable(),
+  reason: z.string(),
+});
+
 export const supplierClaim = z
   .object({
     id,
     purchaseOrderId: id,
     purchaseOrderNumber: paperNumber,
     supplierName: z.string(),
-    receiptId: id,
     state: z.enum(claimStates),
-    lots: z.array(claimedLot),
-    missingAreaMm2: z.string(),
-    /** What the missing area was paid for. */
+    /** Of lots that are short of their mark; null where it is for what went back. */
+    short: z
+      .object({ receiptId: id, lots: z.array(claimedLot), missingAreaMm2: z.string() })
+      .nullable(),
+    sentBack: sentBack.nullable(),
+    /** What was paid for the missing area, or for what went back. */
     worth: confidential(z.string()),
     text: z.string(),
     sentBy: z.enum(['mail', 'hand']),
@@ -86,7 +103,7 @@ export const openClaim = endpoint({
 export const listClaims = endpoint({
   method: 'GET',
   path: '/purchase-orders/{id}/claims',
-  summary: 'What was claimed on an order',
+  summary: 'What was claimed on an order, for what is short and for what went back',
   access: ['owner', 'bookkeeper'],
   params: idParams,
   reply: z.object({ items: z.array(supplierClaim) }),

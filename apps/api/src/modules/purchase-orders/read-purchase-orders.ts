@@ -13,6 +13,7 @@ import { nameOf, readLineNames, serviceOf, type LineNames } from './line-names.t
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { paidOf, readPaid, type Paid } from './paid-for-lines.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
+import { readSentBack, type SentBackOfLines } from './sent-back-of-lines.ts';
 
 /** Orders with their lines and every name in them, newest first. */
 export async function readPurchaseOrderList(
@@ -30,10 +31,19 @@ export async function readPurchaseOrderList(
   const names = await readLineNames(em, lines);
   const paid = await readPaid(em, lines);
   const arrivals = await readDraftArrivals(work, orders);
+  const sentBack = await readSentBack(
+    em,
+    orders.map((order) => order.id),
+  );
   const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
   return orders.map((order) => {
     const own = lines.filter((line) => line.purchaseOrderId === order.id);
-    return toReply(order, suppliers.get(order.supplierId), own, { names, paid, arrivals });
+    return toReply(order, suppliers.get(order.supplierId), own, {
+      names,
+      paid,
+      arrivals,
+      sentBack,
+    });
   });
 }
 
@@ -55,6 +65,7 @@ interface Known {
   names: LineNames;
   paid: Paid;
   arrivals: ReadonlyMap<number, string>;
+  sentBack: SentBackOfLines;
 }
 
 function toReply(
@@ -83,12 +94,14 @@ function toReply(
   };
 }
 
-function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known): LineReply {
+function toLine(line: PurchaseLine, order: PurchaseOrder, known: Known): LineReply {
+  const { names, paid } = known;
   const ofLeather = line.leatherId !== null;
   const area = (thousandths: number) => (ofLeather ? unscaled(thousandths, 3).toFixed() : null);
   const pieces = (quantity: number) => (ofLeather ? null : quantity);
   const goods = (quantity: number) => ({ areaMm2: area(quantity), quantity: pieces(quantity) });
   const { toCome, over, short } = progressOf(line, order);
+  const sentBack = known.sentBack.get(line.id);
   return {
     id: line.id,
     position: line.position,
@@ -103,6 +116,7 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, { names, paid }: Known
     toCome: goods(toCome),
     over: goods(over),
     short: goods(short),
+    sentBack: sentBack === undefined ? null : { ...sentBack, ...goods(sentBack.quantity) },
     expectedOn: line.expectedOn ?? order.expectedOn,
     unitPrice: priceText(line.unitPrice),
     fixedPrice: line.fixedPrice === null ? null : moneyText(line.fixedPrice),

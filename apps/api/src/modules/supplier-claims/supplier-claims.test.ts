@@ -103,7 +103,9 @@ describe('a claim', () => {
       );
     expect(mail).toMatchObject({ recipient: 'orders@example.com', body: draft.text });
     const list = await owner().get(`/api/purchase-orders/${order.id}/claims`).expect(200);
-    expect(list.body.items).toMatchObject([{ id: body.id, lots: [{}, {}] }]);
+    expect(list.body.items).toMatchObject([
+      { id: body.id, short: { lots: [{}, {}], missingAreaMm2: '185806.08' }, sentBack: null },
+    ]);
   });
 
   it('is made once for a lot', async () => {
