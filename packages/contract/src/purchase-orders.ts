@@ -138,6 +138,8 @@ export const purchaseLine = z
     toCome: goods,
     over: goods,
     short: goods,
+    /** What of it went back to its supplier, and on which days first and last. */
+    sentBack: goods.extend({ firstOn: z.string(), lastOn: z.string() }).nullable(),
     /** The day on which the rest is awaited: its own, or the order's. */
     expectedOn: z.string().nullable(),
     /** Per ft², or per piece. */

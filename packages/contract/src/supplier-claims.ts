@@ -1,3 +1,4 @@
+import { hardwareUnits } from '@hidewright/domain';
 import { z } from 'zod';
 import { confidential } from './confidential.ts';
 import { endpoint } from './endpoint.ts';
@@ -15,22 +16,44 @@ const claimedLot = z.object({
   measuredAreaMm2: z.string(),
 });
 
+/** What went back to its supplier: of a lot an area, of hardware a count. */
+const sentBack = z.object({
+  on: z.string(),
+  lotId: id.nullable(),
+  lotTag: z.string().nullable(),
+  hardwareId: id.nullable(),
+  /** Of the leather, or of the hardware. */
+  name: z.string(),
+  unit: z.enum(hardwareUnits).nullable(),
+  areaMm2: z.string().nullable(),
+  quantity: z.int().nullable(),
+  reason: z.string(),
+});
+
 export const supplierClaim = z
   .object({
     id,
     purchaseOrderId: id,
     purchaseOrderNumber: paperNumber,
     supplierName: z.string(),
-    receiptId: id,
     state: z.enum(claimStates),
-    lots: z.array(claimedLot),
-    missingAreaMm2: z.string(),
-    /** What the missing area was paid for. */
+    /** Of lots that are short of their mark; null where it is for what went back. */
+    short: z
+      .object({ receiptId: id, lots: z.array(claimedLot), missingAreaMm2: z.string() })
+      .nullable(),
+    sentBack: sentBack.nullable(),
+    /** What was paid for the missing area, or for what went back. */
     worth: confidential(z.string()),
     text: z.string(),
     sentBy: z.enum(['mail', 'hand']),
     openedAt: z.string(),
     credited: confidential(z.string().nullable()),
+    /** Each note of what was credited, first to last; a later one puts an earlier one right, and says why. */
+    credits: confidential(
+      z.array(
+        z.object({ credited: z.string(), reason: z.string(), at: z.string(), by: z.string() }),
+      ),
+    ),
     /** Why it was given up. */
     note: z.string(),
     closedAt: z.string().nullable(),
@@ -80,11 +103,14 @@ export const openClaim = endpoint({
 export const listClaims = endpoint({
   method: 'GET',
   path: '/purchase-orders/{id}/claims',
-  summary: 'What was claimed on an order',
+  summary: 'What was claimed on an order, for what is short and for what went back',
   access: ['owner', 'bookkeeper'],
   params: idParams,
   reply: z.object({ items: z.array(supplierClaim) }),
 });
+
+/** A credit above the claim, such as with freight; otherwise it is taken for a slip. */
+const moreThanClaimed = z.boolean().default(false);
 
 export const closeClaim = endpoint({
   method: 'PATCH',
@@ -99,6 +125,7 @@ export const closeClaim = endpoint({
       z.strictObject({
         state: z.literal('credited'),
         credited: money.refine((text) => Number(text) > 0, 'Enter what was credited, above 0.'),
+        moreThanClaimed,
       }),
       z.strictObject({
         state: z.literal('given up'),
@@ -107,5 +134,20 @@ export const closeClaim = endpoint({
     ],
     'Say whether it was credited or is given up.',
   ),
+  reply: supplierClaim,
+});
+
+export const correctCredit = endpoint({
+  method: 'PATCH',
+  path: '/supplier-claims/{id}/credit',
+  summary: 'Put right what a claim was credited; 0 opens the claim again',
+  access: ['owner'],
+  edits: true,
+  params: idParams,
+  body: z.strictObject({
+    credited: money,
+    moreThanClaimed,
+    reason: line(200, 'Say what was wrong, in a few words.'),
+  }),
   reply: supplierClaim,
 });

@@ -44,6 +44,7 @@ import { Reservation } from '../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
 import { SupplierOffer } from '../modules/supplier-offers/supplier-offer.entity.ts';
+import { ClaimCredit } from '../modules/supplier-claims/claim-credit.entity.ts';
 import { ClaimedLot } from '../modules/supplier-claims/claimed-lot.entity.ts';
 import { SupplierClaim } from '../modules/supplier-claims/supplier-claim.entity.ts';
 import { Supplier } from '../modules/suppliers/supplier.entity.ts';
@@ -59,6 +60,7 @@ import { Counter } from './counter.entity.ts';
 export const entities = [
   Activity,
   BenchLog,
+  ClaimCredit,
   ClaimedLot,
   Counter,
   CountLine,

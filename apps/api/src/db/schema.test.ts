@@ -75,6 +75,7 @@ describe('the schema', () => {
     'period',
     'time_reading',
     'finished_movement',
+    'claim_credit',
   ])('lets nobody change or delete a row of %s', async (table) => {
     const triggers = await query<{ name: string }>(
       `SELECT name FROM sqlite_master WHERE type = 'trigger' AND tbl_name = '${table}'`,

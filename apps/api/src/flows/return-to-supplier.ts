@@ -9,12 +9,13 @@ import type { StockItem } from '../modules/stock/stock-item.ts';
 import { freeOf, rejectStock } from '../modules/stock/stock-ledger.ts';
 import { StockMovement } from '../modules/stock/stock-movement.entity.ts';
 import type { Work } from '../work.ts';
+import { claimWhatWentBack } from './claim-what-went-back.ts';
 
 type Asked = BodyOf<typeof endpoint>;
 
 /**
  * Sends back to its supplier what came on an order: all that is left of a lot, or so much of a hardware. It leaves
- * the stock at what it stands at.
+ * the stock at what it stands at, and what was paid for it is owed until it is credited.
  * @throws {Problem} 409 when it is held for jobs or has gone already, 422 when it did not come on this order
  */
 export async function returnToSupplier(
@@ -25,11 +26,12 @@ export async function returnToSupplier(
   const order = await findPurchaseOrder(work, orderId);
   const item: StockItem =
     asked.of === 'lot' ? { lotId: asked.lotId } : { hardwareId: asked.hardwareId };
-  const came = await cameOn(work, orderId, item);
-  if (came === 0) throw notOnOrder(asked);
+  const lines = await cameOn(work, orderId, item);
+  if (lines.length === 0) throw notOnOrder(asked);
   const { name, say } = await describeItem(work.em, item);
   const quantity = asked.of === 'lot' ? (await freeOf(work.em, item)).onHand : asked.quantity;
   if (quantity === 0) throw wrongState(`Nothing is left of ${name} that could go back.`);
+  const came = lines.reduce((sum, line) => sum + line.quantity, 0);
   const most = came - (await wentBack(work, orderId, item));
   if (asked.of === 'hardware' && quantity > most) {
     const message = `${say(most)} of ${name} came on ${order.number} and did not go back yet. Enter at most that.`;
@@ -37,6 +39,7 @@ export async function returnToSupplier(
   }
   const { reason } = asked;
   const movement = await rejectStock(work, { ...item, quantity, purchaseOrderId: orderId, reason });
+  await claimWhatWentBack(work, orderId, movement, lines);
   await logDeed(work, {
     action: `sent back ${say(quantity)} of ${name} on purchase order ${order.number}`,
     subjectKind: 'purchase order',
@@ -52,11 +55,14 @@ function notOnOrder(asked: Asked) {
     : invalid([{ field: 'hardwareId', message: 'Choose hardware that came on this order.' }]);
 }
 
-async function cameOn({ em }: Work, purchaseOrderId: number, item: StockItem): Promise<number> {
+async function cameOn(
+  { em }: Work,
+  purchaseOrderId: number,
+  item: StockItem,
+): Promise<ReceiptLine[]> {
   const receipts = await em.find(Receipt, { purchaseOrderId });
   const receiptId = receipts.map(({ id }) => id);
-  const lines = await em.find(ReceiptLine, { receiptId, ...item });
-  return lines.reduce((sum, line) => sum + line.quantity, 0);
+  return em.find(ReceiptLine, { receiptId, ...item });
 }
 
 async function wentBack({ em }: Work, purchaseOrderId: number, item: StockItem): Promise<number> {

@@ -18,6 +18,7 @@ import { TheShelfSales } from './migration-20261207-the-shelf-sales.ts';
 import { TheDays } from './migration-20261208-the-days.ts';
 import { TheChangedOrders } from './migration-20261209-the-changed-orders.ts';
 import { TheMarks } from './migration-20261209-the-marks.ts';
+import { TheCredits } from './migration-20261210-the-credits.ts';
 import { TheDraftedFor } from './migration-20261211-the-drafted-for.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
@@ -42,5 +43,6 @@ export const migrations = [
   { name: 'migration-20261208-the-days', class: TheDays },
   { name: 'migration-20261209-the-changed-orders', class: TheChangedOrders },
   { name: 'migration-20261209-the-marks', class: TheMarks },
+  { name: 'migration-20261210-the-credits', class: TheCredits },
   { name: 'migration-20261211-the-drafted-for', class: TheDraftedFor },
 ];

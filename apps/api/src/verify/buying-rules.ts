@@ -58,6 +58,19 @@ export const buyingRules: Rule[] = [
     FROM supplier_claim c JOIN purchase_order p ON p.id = c.purchase_order_id
     LEFT JOIN claimed_lot k ON k.supplier_claim_id = c.id
     LEFT JOIN receipt_line l ON l.id = k.receipt_line_id AND l.receipt_id = c.receipt_id
-    GROUP BY c.id HAVING COALESCE(SUM(l.marked_area_mm2 - l.quantity), 0) <> c.missing_area_mm2`,
+    GROUP BY c.id HAVING COALESCE(SUM(l.marked_area_mm2 - l.quantity), 0) <> COALESCE(c.missing_area_mm2, 0)`,
+  ),
+  none(
+    'A claim for what went back is of a return on its own order',
+    `SELECT 'a claim on ' || p.number || ' is for row ' || m.id || ' of the ledger, which is no return on it' AS fault
+    FROM supplier_claim c JOIN purchase_order p ON p.id = c.purchase_order_id JOIN stock_movement m ON m.id = c.movement_id
+    WHERE m.kind <> 'reject' OR m.purchase_order_id IS NOT c.purchase_order_id`,
+  ),
+  none(
+    'A claim was credited what was noted of it last',
+    `SELECT 'a claim on ' || p.number || ' says ' || COALESCE(c.credited, 0) || ' credited, its last note ' || noted AS fault
+    FROM (SELECT c.*, COALESCE((SELECT k.credited FROM claim_credit k WHERE k.supplier_claim_id = c.id ORDER BY k.id DESC LIMIT 1), 0)
+      AS noted FROM supplier_claim c) c JOIN purchase_order p ON p.id = c.purchase_order_id
+    WHERE COALESCE(c.credited, 0) <> noted`,
   ),
 ];

@@ -225,6 +225,16 @@ describe('verifying a data folder', () => {
       'short of their mark',
     ],
     [
+      'what a claim is for',
+      'UPDATE supplier_claim SET movement_id = 1, receipt_id = NULL, missing_area_mm2 = NULL WHERE id = 1',
+      'a return on its own order',
+    ],
+    [
+      'what a claim was credited',
+      `UPDATE supplier_claim SET state = 'credited', credited = 100, closed_at = opened_at`,
+      'noted of it last',
+    ],
+    [
       'leather that is out',
       'UPDATE stock_movement SET value = value - 1, quantity = quantity + 1000 WHERE purchase_line_id IS NOT NULL',
       'is out on a sent line',

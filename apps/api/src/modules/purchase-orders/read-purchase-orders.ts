@@ -14,6 +14,7 @@ import { nameOf, readLineNames, serviceOf, wholeOf, type LineNames } from './lin
 import { PurchaseLine } from './purchase-line.entity.ts';
 import { paidOf, readPaid, type Paid } from './paid-for-lines.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
+import { readSentBack, type SentBackOfLines } from './sent-back-of-lines.ts';
 
 /** Orders with their lines and every name in them, newest first. */
 export async function readPurchaseOrderList(
@@ -32,6 +33,10 @@ export async function readPurchaseOrderList(
   const articleNumberOf = await readArticleNumbers(em, orders, lines);
   const paid = await readPaid(em, lines);
   const arrivals = await readDraftArrivals(work, orders);
+  const sentBack = await readSentBack(
+    em,
+    orders.map((order) => order.id),
+  );
   const suppliers = await byId(em.find(Supplier, { id: orders.map((order) => order.supplierId) }));
   return orders.map((order) => {
     const own = lines.filter((line) => line.purchaseOrderId === order.id);
@@ -40,6 +45,7 @@ export async function readPurchaseOrderList(
       articleNumberOf,
       paid,
       arrivals,
+      sentBack,
     });
   });
 }
@@ -63,6 +69,7 @@ interface Known {
   articleNumberOf: ArticleNumberOf;
   paid: Paid;
   arrivals: ReadonlyMap<number, string>;
+  sentBack: SentBackOfLines;
 }
 
 function toReply(
@@ -99,6 +106,7 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, known: Known): LineRep
   const pieces = (quantity: number) => (ofLeather ? null : quantity);
   const goods = (quantity: number) => ({ areaMm2: area(quantity), quantity: pieces(quantity) });
   const { toCome, over, short } = progressOf(line, order);
+  const sentBack = known.sentBack.get(line.id);
   return {
     id: line.id,
     position: line.position,
@@ -115,6 +123,7 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, known: Known): LineRep
     toCome: goods(toCome),
     over: goods(over),
     short: goods(short),
+    sentBack: sentBack === undefined ? null : { ...sentBack, ...goods(sentBack.quantity) },
     expectedOn: line.expectedOn ?? order.expectedOn,
     unitPrice: priceText(line.unitPrice),
     fixedPrice: line.fixedPrice === null ? null : moneyText(line.fixedPrice),

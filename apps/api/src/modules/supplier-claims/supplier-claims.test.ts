@@ -103,7 +103,9 @@ describe('a claim', () => {
       );
     expect(mail).toMatchObject({ recipient: 'orders@example.com', body: draft.text });
     const list = await owner().get(`/api/purchase-orders/${order.id}/claims`).expect(200);
-    expect(list.body.items).toMatchObject([{ id: body.id, lots: [{}, {}] }]);
+    expect(list.body.items).toMatchObject([
+      { id: body.id, short: { lots: [{}, {}], missingAreaMm2: '185806.08' }, sentBack: null },
+    ]);
   });
 
   it('is made once for a lot', async () => {
@@ -127,6 +129,49 @@ describe('a claim', () => {
     const other = await claim((await receive(side(25, 24))).id).expect(201);
     const givenUp = await close(other.body.id, 1, { state: 'given up', note: 'No answer' });
     expect(givenUp.body).toMatchObject({ state: 'given up', note: 'No answer' });
+  });
+
+  it('takes more than was claimed only where somebody says so', async () => {
+    const { body } = await claim((await receive(side(25, 24))).id).expect(201);
+    const credit = (more: object) =>
+      close(body.id, 1, { state: 'credited', credited: '85', ...more });
+    const refused = await credit({}).expect(422);
+    expect(refused.body.errors).toMatchObject([
+      { field: 'credited', message: expect.stringContaining('8.50 was claimed') },
+    ]);
+    const done = await credit({ moreThanClaimed: true }).expect(200);
+    expect(done.body).toMatchObject({ state: 'credited', credited: '85.00' });
+  });
+
+  it('has a credit put right with its reason, and opens again where there was none', async () => {
+    const { body } = await claim((await receive(side(25, 24))).id).expect(201);
+    const correct = (version: number, more: object) =>
+      owner()
+        .patch(`/api/supplier-claims/${body.id}/credit`)
+        .set('If-Match', `"${version}"`)
+        .send({ reason: 'A digit too few', ...more });
+    const early = await correct(1, { credited: '8.50' }).expect(409);
+    expect(early.body.detail).toMatch(/no credit is noted/);
+    await close(body.id, 1, { state: 'credited', credited: '8.00' }).expect(200);
+    await correct(1, { credited: '8.50' }).expect(412);
+    await correct(2, { credited: '85.00' }).expect(422);
+    const right = await correct(2, { credited: '8.50' }).expect(200);
+    expect(right.body).toMatchObject({
+      credited: '8.50',
+      credits: [
+        { credited: '8.00', reason: '' },
+        { credited: '8.50', reason: 'A digit too few' },
+      ],
+    });
+    const none = await correct(3, { credited: '0', reason: 'Another claim’s' }).expect(200);
+    expect(none.body).toMatchObject({ state: 'open', credited: null, closedAt: null });
+    const log = await owner().get('/api/activities').expect(200);
+    expect(log.body.items[0].action).toBe('put right what a claim was credited');
+    await shop
+      .as('bookkeeper')
+      .patch(`/api/supplier-claims/${body.id}/credit`)
+      .send({})
+      .expect(403);
   });
 
   it('is the owner’s, and needs a supplier and words', async () => {

@@ -102,3 +102,68 @@ describe('sending back to the supplier', () => {
     await rivets(0).expect(422);
   });
 });
+
+describe('what went back', () => {
+  const read = async (role: 'owner' | 'maker') =>
+    (await shop.as(role).get(`/api/purchase-orders/${order.id}`).expect(200)).body;
+  const claims = async () =>
+    (await shop.as('bookkeeper').get(`/api/purchase-orders/${order.id}/claims`).expect(200)).body
+      .items;
+  const close = (id: number, body: object) =>
+    shop.as('owner').patch(`/api/supplier-claims/${id}`).set('If-Match', '"1"').send(body);
+
+  it('is marked on the line that it came on, for the maker too', async () => {
+    expect((await read('owner')).lines[0].sentBack).toBeNull();
+    await rivets(200).expect(201);
+    await rivets(100).expect(201);
+    await lot().expect(201);
+    const lastOn = (await shop.as('maker').get('/api/today').expect(200)).body.day;
+    expect((await read('maker')).lines).toMatchObject([
+      { sentBack: { areaMm2: ft2(24), quantity: null, firstOn: lastOn, lastOn } },
+      { sentBack: { areaMm2: null, quantity: 300, lastOn } },
+    ]);
+  });
+
+  it('is owed for at what was paid for it, until it is credited', async () => {
+    await rivets(200).expect(201);
+    expect(await claims()).toMatchObject([
+      {
+        state: 'open',
+        worth: '32.50',
+        short: null,
+        sentBack: { quantity: 200, lotTag: null, reason: 'Wrong colour' },
+      },
+    ]);
+    const [claim] = await claims();
+    await close(claim.id, { state: 'credited', credited: '40' }).expect(422);
+    await close(claim.id, { state: 'credited', credited: '32.50' }).expect(200);
+    expect(await claims()).toMatchObject([{ state: 'credited', credited: '32.50' }]);
+  });
+
+  it('is owed for by its mark where what it missed was claimed already', async () => {
+    const { body } = await shop
+      .as('owner')
+      .post('/api/receipts')
+      .send({
+        purchaseOrderId: order.id,
+        lots: [
+          {
+            leatherId: things.leatherId,
+            purchaseLineId: order.leatherLine,
+            form: 'side',
+            markedAreaMm2: ft2(25),
+            measuredAreaMm2: ft2(24),
+          },
+        ],
+      })
+      .expect(201);
+    await shop
+      .as('owner')
+      .post(`/api/receipts/${body.receipt.id}/claims`)
+      .send({ by: 'hand', text: 'It is short.' })
+      .expect(201);
+    await back({ of: 'lot', lotId: body.lots[0].id }).expect(201);
+    // 25 ft² were paid with 212.50: 1 ft² is claimed, and 24 ft² went back.
+    expect(await claims()).toMatchObject([{ worth: '204.00' }, { worth: '8.50' }]);
+  });
+});

@@ -88,6 +88,24 @@ export const shortOfMark: Source = {
   },
 };
 
+/** Orders of which something went back to its supplier, until it is credited or given up. */
+export const sentBack: Source = {
+  roles: ['owner'],
+  sql: `SELECT p.id, p.number, '' AS title, s.name AS customer, MIN(m.day) AS day, NULL AS extra
+    FROM supplier_claim c JOIN stock_movement m ON m.id = c.movement_id
+      JOIN purchase_order p ON p.id = c.purchase_order_id JOIN supplier s ON s.id = p.supplier_id
+    WHERE c.state = 'open' GROUP BY p.id ORDER BY day, p.id LIMIT 3`,
+  say: (row) => ({
+    kind: 'claim',
+    title: 'Sent back',
+    detail: `${row.number} from ${row.customer}: what went back awaits its credit`,
+    when: by('sent back', row.day),
+    late: false,
+    action: 'Look',
+    to: `/stockroom/purchase-orders/${row.id}`,
+  }),
+};
+
 function claimWords(unclaimed: number, claimed: number): string {
   const lots = (count: number) => (count === 1 ? '1 lot' : `${count} lots`);
   if (unclaimed > 0) return `${lots(unclaimed)} can be claimed`;

@@ -138,6 +138,35 @@ describe('an order to a supplier', () => {
     expect(await toDos('owner', 'claim')).toEqual([]);
   });
 
+  it('waits for the credit of what went back, until it is credited or given up', async () => {
+    const order = await orderMore(shop, things);
+    const { hardwareId } = things;
+    const rivets = { hardwareId, purchaseLineId: order.rivetLine, quantity: 1000 };
+    await maker()
+      .post('/api/receipts')
+      .send({ purchaseOrderId: order.id, hardware: [rivets] })
+      .expect(201);
+    await owner()
+      .post(`/api/purchase-orders/${order.id}/returns`)
+      .send({ of: 'hardware', hardwareId, quantity: 200, reason: 'Wrong colour' })
+      .expect(201);
+    expect(await toDos('owner', 'claim')).toMatchObject([
+      {
+        title: 'Sent back',
+        detail: expect.stringContaining('what went back awaits its credit'),
+        to: `/stockroom/purchase-orders/${order.id}`,
+      },
+    ]);
+    expect(await toDos('maker', 'claim')).toEqual([]);
+    const { body } = await owner().get(`/api/purchase-orders/${order.id}/claims`).expect(200);
+    await owner()
+      .patch(`/api/supplier-claims/${body.items[0].id}`)
+      .set('If-Match', '"1"')
+      .send({ state: 'given up', note: 'They sent others instead.' })
+      .expect(200);
+    expect(await toDos('owner', 'claim')).toEqual([]);
+  });
+
   it('shows the owner what came at another price, never the maker', async () => {
     const order = await orderMore(shop, things);
     const rivets = { hardwareId: things.hardwareId, purchaseLineId: order.rivetLine };

@@ -1,4 +1,10 @@
-import { draftOrders, handedInCounts, openCounts, shortOfMark } from './stockroom-sources.ts';
+import {
+  draftOrders,
+  handedInCounts,
+  openCounts,
+  sentBack,
+  shortOfMark,
+} from './stockroom-sources.ts';
 import { by, past, type Source } from './to-do-source.ts';
 
 export const sources: Source[] = [
@@ -104,6 +110,7 @@ export const sources: Source[] = [
     }),
   },
   shortOfMark,
+  sentBack,
   {
     roles: ['owner'],
     sql: `SELECT o.id, o.number, o.title, c.name AS customer, o.promised_on AS day, o.quantity AS extra

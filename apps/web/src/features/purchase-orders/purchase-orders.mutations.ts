@@ -6,6 +6,7 @@ import {
   changeReceipt,
   closeClaim,
   closePurchaseLine,
+  correctCredit,
   openClaim,
   reopenPurchaseOrder,
   returnToSupplier,
@@ -32,5 +33,7 @@ export const useChangeReceipt = () => useSend(changeReceipt);
 export const useOpenClaim = () => useSend(openClaim);
 
 export const useCloseClaim = () => useSend(closeClaim);
+
+export const useCorrectCredit = () => useSend(correctCredit);
 
 export const useReturnToSupplier = () => useSend(returnToSupplier);

@@ -17,6 +17,7 @@ const none = {
   toCome: nothing,
   over: nothing,
   short: nothing,
+  sentBack: null,
   expectedOn: null,
 };
 const leather = (id: number, name: string, areaMm2: string, toCome: string): PurchaseLine => ({

@@ -1,10 +1,10 @@
 import { closeClaim, type SupplierClaim } from '@hidewright/contract';
 import { Dialog } from '../../../components/dialog.tsx';
 import { Form } from '../../../components/form.tsx';
-import { MoneyField } from '../../../components/money-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { useCloseClaim } from '../purchase-orders.mutations.ts';
+import { CreditFields } from './credit-fields.tsx';
 
 interface CloseClaimDialogProps {
   claim: SupplierClaim;
@@ -28,7 +28,11 @@ export function CloseClaimDialog({ claim, as, onClose }: CloseClaimDialogProps) 
     >
       <Form
         schema={closeClaim.body}
-        defaults={credited ? { state: as, credited: claim.worth ?? '' } : { state: as, note: '' }}
+        defaults={
+          credited
+            ? { state: as, credited: claim.worth ?? '', moreThanClaimed: false }
+            : { state: as, note: '' }
+        }
         submitWord={credited ? 'Note the credit' : 'Give it up'}
         submitTone={credited ? 'primary' : 'danger'}
         onSend={async (body) => {
@@ -38,11 +42,7 @@ export function CloseClaimDialog({ claim, as, onClose }: CloseClaimDialogProps) 
           say(credited ? 'The credit is noted.' : 'The claim is given up.');
         }}
       >
-        {credited ? (
-          <MoneyField name="credited" label="Credited" />
-        ) : (
-          <TextField name="note" label="Why" />
-        )}
+        {credited ? <CreditFields claim={claim} /> : <TextField name="note" label="Why" />}
       </Form>
     </Dialog>
   );

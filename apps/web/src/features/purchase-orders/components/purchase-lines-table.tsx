@@ -12,6 +12,7 @@ import { goodsText } from '../goods-text.ts';
 import { AwaitedDayDialog } from './awaited-day-dialog.tsx';
 import { CloseLineDialog } from './close-line-dialog.tsx';
 import { LineProgress } from './line-progress.tsx';
+import { ReceivedOf } from './received-of.tsx';
 import { ReopenDialog } from './reopen-dialog.tsx';
 
 const placeOf = ({ service, leatherId, hardwareId }: PurchaseLine) => {
@@ -129,8 +130,7 @@ function arrivalColumns(
       id: 'received',
       header: 'Received',
       value: (row) => row.receivedAreaMm2 ?? row.received,
-      cell: ({ receivedAreaMm2, received, unit }) =>
-        goodsText({ areaMm2: receivedAreaMm2, quantity: received }, workshop, unit),
+      cell: (row) => <ReceivedOf line={row} />,
       align: 'right',
     },
     {

@@ -51,7 +51,7 @@ export function ReturnDialog({ orderId, receipts, onClose }: ReturnDialogProps) 
       open
       onOpenChange={onClose}
       title="What goes back?"
-      description="What is held for jobs stays. The supplier is not told by this: write to them yourself."
+      description="What is held for jobs stays. The supplier is not told by this: write to them yourself. What it was paid for stands open among the claims until they credit it."
     >
       <Form
         schema={returnToSupplier.body}
