@@ -108,7 +108,7 @@ walk('a kit, and a post that does not suit the folded leather', async ({ page })
   await page.getByLabel('In each').nth(1).fill('2');
   await page.getByLabel('It costs what its parts cost').check();
   await page.getByRole('button', { name: 'Add it' }).click();
-  await page.getByText('Made up by its parts').waitFor();
+  await page.getByText('Whole kits its parts make up').waitFor();
   await page.getByText('what its parts cost', { exact: true }).waitFor();
   await expectAccessible(page);
 

@@ -51,6 +51,8 @@ export const orderSuggestion = z
     ...thing,
     name: z.string(),
     kind: z.enum(['leather', 'hardware', 'supplies']),
+    /** The kits that it is a part of, with the whole ones that are free of each. */
+    kits: z.array(z.object({ id, name: z.string(), free: z.int() })),
     /** What it is counted in: mm2 of leather, else what one of it is. */
     unit: z.enum(['mm2', ...hardwareUnits]),
     state: z.enum(['now', 'soon', 'drafted', 'fine']),

@@ -68,12 +68,24 @@ export const hardwareLevel = z
   .meta({ id: 'HardwareLevel' });
 export type HardwareLevel = z.infer<typeof hardwareLevel>;
 
+/** The whole kits that the parts on hand made up: they are in none of the sums, since their parts are. */
+const kitLevel = z
+  .object({
+    hardwareId: id,
+    name: z.string(),
+    quantity: z.int(),
+    parts: z.array(z.object({ name: z.string(), quantity: z.int() })),
+  })
+  .meta({ id: 'KitLevel' });
+export type KitLevel = z.infer<typeof kitLevel>;
+
 export const stockLevels = z
   .object({
     /** The end of this day. */
     on: z.string(),
     leathers: z.array(leatherLevel),
     hardware: z.array(hardwareLevel),
+    kits: z.array(kitLevel),
     leatherAreaMm2: z.string(),
     leatherValue: confidential(z.string()),
     hardwareValue: confidential(z.string()),

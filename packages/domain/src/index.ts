@@ -136,6 +136,7 @@ export * from './stock/best-buy.ts';
 export * from './stock/ordered-quantity.ts';
 
 export * from './hardware/kit-prices.ts';
+export * from './hardware/kit-words.ts';
 export * from './hardware/count-by-weight.ts';
 export * from './hardware/units.ts';
 export * from './hardware/post-fit.ts';

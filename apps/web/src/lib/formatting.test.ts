@@ -42,5 +42,11 @@ describe('days', () => {
   it('shows an instant on the day it was in the workshop', () => {
     expect(instantText('2026-12-01T23:30:00.000Z', 'Europe/Berlin')).toBe('Wed 2 Dec, 00:30');
     expect(instantText('2026-12-01T23:30:00.000Z', 'UTC')).toBe('Tue 1 Dec, 23:30');
+    expect(instantText('2025-12-31T23:30:00.000Z', 'UTC', '2026-12-01')).toBe(
+      'Wed 31 Dec 2025, 23:30',
+    );
+    expect(instantText('2025-12-31T23:30:00.000Z', 'Europe/Berlin', '2026-12-01')).toBe(
+      'Thu 1 Jan, 00:30',
+    );
   });
 });

@@ -102,8 +102,8 @@ export function longDayText(day: string): string {
   return `${longWeekdays[weekday]} ${date} ${longMonth.format(new Date(`${day.slice(0, 10)}T00:00:00Z`))}`;
 }
 
-/** An instant in the workshop's time: Mon 14 Dec, 08:40 */
-export function instantText(instant: string, timeZone: string): string {
+/** An instant in the workshop's time: Mon 14 Dec, 08:40, with the year where it is another than today's. */
+export function instantText(instant: string, timeZone: string, today?: string): string {
   const parts = new Intl.DateTimeFormat('en-GB', {
     timeZone,
     year: 'numeric',
@@ -114,5 +114,5 @@ export function instantText(instant: string, timeZone: string): string {
   }).formatToParts(new Date(instant));
   const part = (type: string) => parts.find((found) => found.type === type)?.value ?? '';
   const day = `${part('year')}-${part('month')}-${part('day')}`;
-  return `${dayText(day)}, ${part('hour')}:${part('minute')}`;
+  return `${dayText(day, today)}, ${part('hour')}:${part('minute')}`;
 }

@@ -9,6 +9,7 @@ import {
   type ItemUse,
   type OrderSuggestion,
 } from '@hidewright/domain';
+import { readKits, type Kit } from '../../modules/hardware/kit-counts.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { Work } from '../../work.ts';
 import { readOwedByStart } from '../check/owed-by-start.ts';
@@ -32,6 +33,8 @@ interface Amounts {
 /** A thing with all that is known of it and what follows. */
 export interface Suggested {
   row: ItemRow;
+  /** Those that it is a part of. */
+  kits: readonly Kit[];
   sold: ItemSource;
   use: ItemUse;
   amounts: Amounts;
@@ -62,6 +65,7 @@ interface Known {
   used: Awaited<ReturnType<typeof readUsedByWeek>>;
   openLines: Awaited<ReturnType<typeof readOpenLines>>;
   owed: OwedToJobs;
+  kits: readonly Kit[];
 }
 
 /**
@@ -78,6 +82,7 @@ export async function suggestOrders(work: Work): Promise<Suggestions> {
     used: await readUsedByWeek(em, today),
     openLines: await readOpenLines(em, today),
     owed: (await readOwedByStart(work)).owed,
+    kits: await readKits(em),
   };
   const [items, unclear]: [Suggested[], Unclear[]] = [[], []];
   for (const row of rows) {
@@ -109,8 +114,13 @@ function suggestFor(row: ItemRow, known: Known): Suggested {
   });
   const { today } = known;
   const coming = comingStock({ ...amounts, promised, receipts, today, daily: dailyUse(use) });
-  return { row, sold, use, amounts, promised, open, suggestion, coming };
+  return { row, kits: kitsOf(row, known), sold, use, amounts, promised, open, suggestion, coming };
 }
+
+const kitsOf = ({ of, id }: ItemRow, { kits }: Known): Kit[] =>
+  of === 'hardware'
+    ? kits.filter(({ parts }) => parts.some(({ hardwareId }) => hardwareId === id))
+    : [];
 
 const inUnits = (row: ItemRow, all: readonly Dated[]): Dated[] =>
   all.map((each) => ({ ...each, quantity: counted(row, each.quantity) }));

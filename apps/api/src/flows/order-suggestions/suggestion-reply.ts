@@ -2,6 +2,7 @@ import type { OrderSuggestionReply } from '@hidewright/contract';
 import { addDays, countWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
+import { kitCounts } from '../../modules/hardware/kit-counts.ts';
 import { sayArea } from '../../modules/stock/say-area.ts';
 import type { Suggested, Suggestions } from './suggest-orders.ts';
 import { whyWords, type Say } from './why-words.ts';
@@ -20,6 +21,7 @@ export function suggestionReply(item: Suggested, around: Around): OrderSuggestio
   const dueOn = dueInDays === null ? null : addDays(today, Math.min(dueInDays, 3650));
   return {
     ...{ of: row.of, id: row.id, name: row.name, kind: row.kind, unit: row.unit },
+    kits: item.kits.map(({ id, name, parts }) => ({ id, name, free: kitCounts(parts).free })),
     state: suggestion.state,
     why: whyWords(item, sayerOf(item, around), dueOn),
     ...amountsOf(item),

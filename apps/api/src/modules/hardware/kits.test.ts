@@ -55,6 +55,29 @@ describe('a kit', () => {
     expect(await read(cap)).toMatchObject({ partOf: [{ name: 'Rivet 9 mm' }], parts: [] });
   });
 
+  it('is said where its parts are: what to order, on hand and found', async () => {
+    const { body: toOrder } = await owner().get('/api/order-suggestions?show=all').expect(200);
+    const kitsOf = (hardwareId: number) =>
+      toOrder.items.find(({ id }: { id: number }) => id === hardwareId).kits;
+    expect(kitsOf(post)).toEqual([{ id: kit.id, name: 'Rivet 9 mm', free: 102 }]);
+
+    const { body: levels } = await owner().get('/api/stock-levels').expect(200);
+    expect(levels.kits).toEqual([
+      {
+        ...{ hardwareId: kit.id, name: 'Rivet 9 mm', quantity: 102 },
+        parts: [
+          { name: 'Cap 9 mm', quantity: 1 },
+          { name: 'Post 8 mm', quantity: 2 },
+        ],
+      },
+    ]);
+    const { body: earlier } = await owner().get('/api/stock-levels?on=2025-01-01').expect(200);
+    expect(earlier.kits).toMatchObject([{ name: 'Rivet 9 mm', quantity: 0 }]);
+
+    const { body: found } = await owner().get('/api/search?q=Rivet%209').expect(200);
+    expect(found.items).toMatchObject([{ label: 'Rivet 9 mm', detail: 'hardware · a kit' }]);
+  });
+
   it('is not received or counted itself: its parts are', async () => {
     const refused = await receive(kit.id, 10).expect(422);
     expect(refused.body.errors[0].message).toBe(

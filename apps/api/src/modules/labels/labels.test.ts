@@ -35,7 +35,7 @@ describe('tags', () => {
       {
         tag: lot.tag,
         code: `http://shop.example.com/t/${lot.tag}`,
-        lines: ['side, 24.75 ft²', 'rack 2', 'received 2026-12-01'],
+        lines: ['side, 24.75 ft²', 'rack 2', 'received Tue 1 Dec 2026'],
       },
       {
         tag: bin,

@@ -2,6 +2,7 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { binTag, tagAddress } from '@hidewright/domain';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { Label } from '../../papers/label-sheet-pdf.ts';
+import { sayDay } from '../quotes/say-day.ts';
 import { sayArea } from '../stock/say-area.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 
@@ -53,7 +54,7 @@ export async function readLabels(em: EntityManager, asked: Asked): Promise<Label
       lines: [
         `${row.pieces > 1 ? `${row.pieces} × ` : ''}${row.form}, ${sayArea(unscaled(row.area, 3), areaUnit)}`,
         ...(row.place === '' ? [] : [row.place]),
-        `received ${row.received_on}`,
+        `received ${sayDay(row.received_on)}`,
       ],
     })),
     ...bins.map(({ id, name, kind, pack_size }) => ({

@@ -71,7 +71,9 @@ const sources: Source[] = [
   {
     kind: 'hardware',
     roles: ['owner', 'maker'],
-    sql: `SELECT h.id AS key, h.name AS label, h.kind || ' · ' || COALESCE(b.on_hand, 0) || ' on hand' AS detail
+    sql: `SELECT h.id AS key, h.name AS label, h.kind || ' · ' ||
+        CASE WHEN EXISTS (SELECT 1 FROM kit_part k WHERE k.kit_id = h.id) THEN 'a kit'
+          ELSE COALESCE(b.on_hand, 0) || ' on hand' END AS detail
       FROM hardware h LEFT JOIN stock_balance b ON b.hardware_id = h.id
       WHERE h.name LIKE ? ESCAPE '\\' OR h.kind LIKE ? ESCAPE '\\' ORDER BY h.name LIMIT 5`,
     to: (key) => `/stockroom/hardware/${key}`,

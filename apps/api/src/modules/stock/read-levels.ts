@@ -1,8 +1,10 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
-import type { HardwareLevel, LeatherLevel, StockLevels } from '@hidewright/contract';
+import type { HardwareLevel, KitLevel, LeatherLevel, StockLevels } from '@hidewright/contract';
+import { wholeKits } from '@hidewright/domain';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
+import { readKits } from '../hardware/kit-counts.ts';
 import { readOutAt } from './out-at.ts';
 import type { Standings } from './standings.ts';
 
@@ -53,6 +55,7 @@ export async function readLevels(em: EntityManager, asked: Asked): Promise<Stock
       value: money(row.value),
       standing: standings.ofHardware(row.id),
     })),
+    kits: isOfAll(asked) ? await readKitLevels(em, pieces) : [],
     leatherAreaMm2: area(sumOf(lots, 'quantity')),
     leatherValue: money(leatherValue),
     hardwareValue: money(hardwareValue),
@@ -70,6 +73,24 @@ export async function readLevels(em: EntityManager, asked: Asked): Promise<Stock
     outValue: money(sumOf(out, 'value')),
     value: money(leatherValue + hardwareValue),
   };
+}
+
+const isOfAll = ({ hardwareId, leatherId }: Asked): boolean =>
+  hardwareId === undefined && leatherId === undefined;
+
+/** By what was there of the parts then, as they make up a kit today. */
+async function readKitLevels(
+  em: EntityManager,
+  pieces: readonly HardwareRow[],
+): Promise<KitLevel[]> {
+  const there = new Map(pieces.map(({ id, quantity }) => [id, quantity]));
+  return (await readKits(em)).map(({ id, name, parts }) => ({
+    ...{ hardwareId: id, name },
+    quantity: wholeKits(
+      parts.map(({ hardwareId, quantity }) => ({ quantity, there: there.get(hardwareId) ?? 0 })),
+    ),
+    parts: parts.map((part) => ({ name: part.name, quantity: part.quantity })),
+  }));
 }
 
 const money = (hundredths: number): string => moneyText(unscaled(hundredths, 2));

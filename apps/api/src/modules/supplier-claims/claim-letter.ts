@@ -1,5 +1,6 @@
 import type { draftClaim, ReplyOf } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
+import { sayDay } from '../quotes/say-day.ts';
 import { sayArea } from '../stock/say-area.ts';
 
 interface Claimed extends Omit<ReplyOf<typeof draftClaim>, 'text' | 'supplierEmail'> {
@@ -22,7 +23,7 @@ export function claimLetter(claimed: Claimed, from: Sender): string {
   );
   return [
     'Good day,',
-    `Of our order ${claimed.orderNumber}, which came on ${claimed.receivedOn}, these are smaller than is marked on them:`,
+    `Of our order ${claimed.orderNumber}, which came on ${sayDay(claimed.receivedOn)}, these are smaller than is marked on them:`,
     lots.join('\n'),
     `Together ${say(claimed.missingAreaMm2)} is missing, which is ${from.currency} ${claimed.worth} at the price of the order. Please credit it, or tell us how you measure.`,
     from.name,

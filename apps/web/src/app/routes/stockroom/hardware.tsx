@@ -1,4 +1,5 @@
 import type { Hardware } from '@hidewright/contract';
+import { kitWords } from '@hidewright/domain';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
 import { Card } from '../../../components/card.tsx';
@@ -48,7 +49,7 @@ export function Component() {
     <>
       <PageHeader
         title={hardware.name}
-        subtitle={hardware.short ? <StateMark state="short" /> : hardware.kind}
+        subtitle={hardware.short ? <StateMark state="short" /> : kindWords(hardware)}
         action={handlesStock && !isKit && <Actions hardware={hardware} isOwner={isOwner} />}
       />
       <ItemLayout
@@ -104,6 +105,9 @@ export function Component() {
     </>
   );
 }
+
+const kindWords = ({ kind, parts }: Hardware): string =>
+  parts.length > 0 ? `${kind}, ${kitWords(parts)}` : kind;
 
 function Actions({ hardware, isOwner }: { hardware: Hardware; isOwner: boolean }) {
   const { id, fromCustomer } = hardware;

@@ -11,6 +11,7 @@ import { RouteError } from '../../../components/route-error.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
 import {
   HardwareLevels,
+  KitLevels,
   LeatherLevels,
 } from '../../../features/stock/components/levels-tables.tsx';
 import { levelsQuery } from '../../../features/stock/stock.queries.ts';
@@ -95,6 +96,7 @@ export function Component() {
         </Card>
         <Card title="Hardware and supplies">
           <HardwareLevels levels={levels} />
+          {levels.kits.length > 0 && <KitLevels kits={levels.kits} />}
         </Card>
       </div>
     </>

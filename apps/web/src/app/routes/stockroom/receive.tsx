@@ -107,7 +107,7 @@ function Receiving({ asked, onReceived }: ReceivingProps) {
         order={order ?? undefined}
         defaults={order ? deliveryOf(order, today) : directly(search, today)}
         leathers={choicesOf(leathers.items)}
-        hardware={choicesOf(hardware.items)}
+        hardware={choicesOf(hardware.items.filter(({ parts }) => parts.length === 0))}
         tolerancePercent={workshop.areaTolerancePercent}
         mayPrice={isOwner}
         onReceived={onReceived}

@@ -12,7 +12,7 @@ import { movedWords } from '../finished-words.ts';
 import { ShowEarlier } from '../../../components/show-earlier.tsx';
 
 function columnsFor(
-  { currency, timeZone }: Workshop,
+  { currency, timeZone, today }: Workshop,
   withValues: boolean,
 ): Column<FinishedMovement>[] {
   const value: Column<FinishedMovement> = {
@@ -27,7 +27,7 @@ function columnsFor(
       id: 'at',
       header: 'When',
       value: (row) => row.at,
-      cell: (row) => instantText(row.at, timeZone),
+      cell: (row) => instantText(row.at, timeZone, today),
       onPhone: 'title',
     },
     { id: 'kind', header: 'What', value: (row) => movedWords[row.kind] },

@@ -10,7 +10,7 @@ export function HardwareFacts({ hardware }: { hardware: Hardware }) {
   const { unit, parts } = hardware;
   const isKit = parts.length > 0;
   const counts = [
-    { word: isKit ? 'Made up by its parts' : 'On hand', count: hardware.onHand },
+    { word: isKit ? 'Whole kits its parts make up' : 'On hand', count: hardware.onHand },
     { word: 'Held for jobs', count: hardware.reserved },
     { word: 'Free', count: hardware.free },
     { word: 'On order', count: hardware.onOrder },

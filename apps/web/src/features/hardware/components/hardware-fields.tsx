@@ -1,4 +1,5 @@
-import { unitWord, type HardwareUnit } from '@hidewright/domain';
+import type { Hardware } from '@hidewright/contract';
+import { kitWords, unitWord, type HardwareUnit } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { useEffect } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
@@ -28,7 +29,7 @@ export function HardwareFields({ suppliers, own }: HardwareFieldsProps) {
   const parts = useWatch({ name: 'parts' }) as unknown[] | undefined;
   const isKit = (parts?.length ?? 0) > 0;
   const unit = useWatch({ name: 'unit' }) as HardwareUnit | undefined;
-  const choices = useOtherHardware(own);
+  const others = useOtherHardware(own);
   return (
     <>
       <RadioCards name="kind" label="Kind" cards={kinds} across />
@@ -57,8 +58,8 @@ export function HardwareFields({ suppliers, own }: HardwareFieldsProps) {
       )}
       <WhatItIsFields />
       <SettingFields />
-      <KitFields choices={choices} />
-      <StandInFields choices={choices} />
+      <KitFields choices={choicesAmong(others.filter(({ parts: its }) => its.length === 0))} />
+      <StandInFields choices={choicesAmong(others)} />
     </>
   );
 }
@@ -77,10 +78,15 @@ function PriceField({ isKit }: { isKit: boolean }) {
   );
 }
 
-function useOtherHardware(own: number | undefined): Choice[] {
+function useOtherHardware(own: number | undefined): Hardware[] {
   const { data } = useQuery(hardwareListQuery());
   return (data?.items ?? [])
     .filter(({ id, active }) => active && id !== own)
-    .sort((a, b) => a.name.localeCompare(b.name, 'en'))
-    .map(({ id, name }) => ({ value: id, label: name }));
+    .sort((a, b) => a.name.localeCompare(b.name, 'en'));
 }
+
+const choicesAmong = (hardware: readonly Hardware[]): Choice[] =>
+  hardware.map(({ id, name, parts }) => ({
+    value: id,
+    label: parts.length > 0 ? `${name}, ${kitWords(parts)}` : name,
+  }));

@@ -1,5 +1,5 @@
 import type { Hardware } from '@hidewright/contract';
-import { unitWord } from '@hidewright/domain';
+import { kitWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { useMemo, type ReactNode } from 'react';
 import type { Column } from '../../../components/column.ts';
@@ -54,6 +54,7 @@ const basics: Column<Hardware>[] = [
           <span className="text-sm text-ink-soft">in {unitWord(row.unit, 2)}</span>
         )}
         {row.short && <StateMark state="short" />}
+        <KitRemark row={row} />
       </span>
     ),
     onPhone: 'title',
@@ -64,6 +65,15 @@ const basics: Column<Hardware>[] = [
   counted('free', 'Free', (row) => row.free),
   counted('onOrder', 'On order', (row) => row.onOrder),
 ];
+
+/** That it is a kit, which is counted by what its parts make up; or a part of one. */
+function KitRemark({ row: { parts, partOf } }: { row: Hardware }) {
+  const words =
+    parts.length > 0
+      ? `${kitWords(parts)}; as many as they make up`
+      : partOf.length > 0 && `a part of ${partOf.map(({ name }) => name).join(' and ')}`;
+  return words && <span className="basis-full text-sm text-ink-soft">{words}</span>;
+}
 
 interface HardwareTableProps {
   rows: readonly Hardware[];

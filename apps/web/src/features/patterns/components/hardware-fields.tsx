@@ -1,4 +1,4 @@
-import { unitWord, type HardwareUnit } from '@hidewright/domain';
+import { kitWords, unitWord, type HardwareUnit } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { Plus } from 'lucide-react';
 import { useState } from 'react';
@@ -30,9 +30,9 @@ export function HardwareFields() {
   const { fields, append, remove } = useFieldArray({ name });
   const { data: hardware = [] } = useQuery(hardwareChoicesQuery());
   const [adding, setAdding] = useState(false);
-  const choices = hardware.map(({ id, name: label, unitPrice, unit }) => ({
+  const choices = hardware.map(({ id, name: label, unitPrice, unit, parts }) => ({
     value: id,
-    label: `${label}${priceOf(unitPrice, unit)}`,
+    label: `${label}${priceOf(unitPrice, unit)}${parts.length > 0 ? `, ${kitWords(parts)}` : ''}`,
   }));
   return (
     <fieldset>

@@ -1,5 +1,5 @@
-import type { HardwareLevel, LeatherLevel, StockLevels } from '@hidewright/contract';
-import { unitWord } from '@hidewright/domain';
+import type { HardwareLevel, KitLevel, LeatherLevel, StockLevels } from '@hidewright/contract';
+import { kitWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { useMemo } from 'react';
 import type { Column } from '../../../components/column.ts';
@@ -132,5 +132,23 @@ export function HardwareLevels({ levels }: { levels: StockLevels }) {
       columns={columns}
       empty={<EmptyState title="There is no hardware yet." />}
     />
+  );
+}
+
+/** How many whole kits the parts in the table make up: nothing that lies there besides. */
+export function KitLevels({ kits }: { kits: readonly KitLevel[] }) {
+  return (
+    <div className="mt-4 text-ink-soft">
+      <p>Kits lie there as their parts, which make up:</p>
+      <ul className="mt-1 list-disc pl-5">
+        {kits.map(({ hardwareId, name, quantity, parts }) => (
+          <li key={hardwareId}>
+            {`${countText(quantity)} × `}
+            <TextLink to={`/stockroom/hardware/${hardwareId}`}>{name}</TextLink>
+            {`, ${kitWords(parts)}`}
+          </li>
+        ))}
+      </ul>
+    </div>
   );
 }

@@ -27,7 +27,7 @@ function columnsFor(
   workshop: Workshop,
   { withValues, mixed }: { withValues: boolean; mixed: boolean },
 ): Column<StockMovement>[] {
-  const { currency, timeZone } = workshop;
+  const { currency, timeZone, today } = workshop;
   const value: Column<StockMovement> = {
     id: 'value',
     header: `At cost, ${currency}`,
@@ -40,7 +40,7 @@ function columnsFor(
       id: 'at',
       header: 'When',
       value: (row) => row.at,
-      cell: (row) => instantText(row.at, timeZone),
+      cell: (row) => instantText(row.at, timeZone, today),
       onPhone: 'title',
     },
     ...(mixed ? [itemColumn] : []),

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 import { Card } from '../../../components/card.tsx';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { dayText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { countText, dayText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { amountText, heldNote, wholeWords } from '../to-order-words.ts';
 import { ByHand } from './by-hand.tsx';
@@ -32,6 +32,7 @@ export function ItemCard({ item, mayOrder, children, ...rates }: ItemCardProps) 
       subtitle={item.supplierName ? `from ${item.supplierName}` : 'nobody is named who sells it'}
     >
       <p className="mb-4 max-w-prose">{item.why}</p>
+      <Kits item={item} />
       <KeyFigures figures={figuresOf(item, workshop)} />
       {children && item.state !== 'fine' && (
         <div className="mt-4 border-t border-stitch pt-4">{children}</div>
@@ -50,6 +51,22 @@ export function ItemCard({ item, mayOrder, children, ...rates }: ItemCardProps) 
         </div>
       </details>
     </Card>
+  );
+}
+
+/** Kits are not bought themselves: this is one of the things that make them up. */
+function Kits({ item: { kits } }: { item: Item }) {
+  if (kits.length === 0) return null;
+  return (
+    <ul className="-mt-2 mb-4 max-w-prose text-ink-soft">
+      {kits.map(({ id, name, free }) => (
+        <li key={id}>
+          {'A part of the kit '}
+          <TextLink to={`/stockroom/hardware/${id}`}>{name}</TextLink>
+          {`: what is free of all its parts makes up ${countText(free)}.`}
+        </li>
+      ))}
+    </ul>
   );
 }
 
