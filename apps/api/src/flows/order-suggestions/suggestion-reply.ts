@@ -3,7 +3,7 @@ import { addDays, countWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
 import { kitCounts } from '../../modules/hardware/kit-counts.ts';
-import { sayArea } from '../../modules/stock/say-area.ts';
+import { sayRackArea } from '../../modules/stock/say-area.ts';
 import type { Suggested, Suggestions } from './suggest-orders.ts';
 import { whyWords, type Say } from './why-words.ts';
 
@@ -41,9 +41,7 @@ export function suggestionReply(item: Suggested, around: Around): OrderSuggestio
 
 function sayerOf({ row }: Suggested, { workshop }: Around): Say {
   const { unit } = row;
-  if (unit === 'mm2') {
-    return (areaMm2) => sayArea(new Decimal(areaMm2), workshop.areaUnit);
-  }
+  if (unit === 'mm2') return (areaMm2) => sayRackArea(new Decimal(areaMm2), workshop);
   return (count) => {
     // Below ten a rate such as 2.5 a week would lose its sense.
     const rounded = new Decimal(count).toDecimalPlaces(count < 10 ? 1 : 0).toFixed();

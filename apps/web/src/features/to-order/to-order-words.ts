@@ -1,15 +1,15 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
 import { unitWord, wholes } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
-import { areaText, countText, numberText } from '../../lib/formatting.ts';
+import { countText, numberText, rackAreaText } from '../../lib/formatting.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
 type Item = OrderSuggestionReply;
 type Unit = Pick<Item, 'unit'>;
 
 /** A quantity as people say it: 1,250, 12 pairs, 40 m, or 24.8 ft². */
-export function amountText(value: string, { unit }: Unit, { areaUnit }: Workshop): string {
-  if (unit === 'mm2') return areaText(value, areaUnit, 1);
+export function amountText(value: string, { unit }: Unit, workshop: Workshop): string {
+  if (unit === 'mm2') return rackAreaText(value, workshop);
   const rounded = new Decimal(value).toDecimalPlaces(Math.abs(Number(value)) < 10 ? 1 : 0);
   const figure = rounded.isInteger() ? countText(rounded.toNumber()) : rounded.toFixed();
   const word = unitWord(unit, rounded.toNumber());

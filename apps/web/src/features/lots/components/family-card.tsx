@@ -2,7 +2,7 @@ import type { FamilyMember, WentInto } from '@hidewright/contract';
 import { useQuery } from '@tanstack/react-query';
 import { Card } from '../../../components/card.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaText, countText } from '../../../lib/formatting.ts';
+import { countText, rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { depthOf } from '../lot-words.ts';
 import { lotFamilyQuery } from '../lot-family.queries.ts';
@@ -64,8 +64,8 @@ interface MemberProps {
 }
 
 function Member({ lot, isThis, wasWorkedOn }: MemberProps) {
-  const { areaUnit } = useWorkshop();
-  const area = (areaMm2: string) => areaText(areaMm2, areaUnit);
+  const workshop = useWorkshop();
+  const area = (areaMm2: string) => rackAreaText(areaMm2, workshop);
   const after = lot.service === null ? '' : `after ${lot.service}`;
   const words = [after, lot.form, lot.shade, lot.place].filter((word) => word !== '').join(', ');
   return (
@@ -109,7 +109,7 @@ interface UseProps {
 }
 
 function Use({ use, fromOther, mayOpenJobs }: UseProps) {
-  const { areaUnit } = useWorkshop();
+  const workshop = useWorkshop();
   const { jobId, jobNumber, orderId, orderNumber, title, customerName, areaMm2, good } = use;
   return (
     <li className="flex flex-wrap items-center justify-between gap-x-4 py-1.5">
@@ -124,7 +124,7 @@ function Use({ use, fromOther, mayOpenJobs }: UseProps) {
         </div>
       </div>
       <span>
-        {areaText(areaMm2, areaUnit)}
+        {rackAreaText(areaMm2, workshop)}
         {fromOther && ` of ${use.tag}`}
       </span>
     </li>
