@@ -82,7 +82,7 @@ export function Component() {
           <MovementsTable item={item} />
         </Card>
         {handlesStock && (
-          <Card title="Where it lies">
+          <Card title="Where it lies and what is noted of it">
             <ChangeLotForm key={id} lot={lot} />
           </Card>
         )}

@@ -52,7 +52,10 @@ export function LotFacts({ lot }: { lot: Lot }) {
           { word: 'Shade', figure: given(lot.shade) },
           { word: 'Grade', figure: given(lot.grade) },
           { word: 'Supplier’s lot', figure: given(lot.supplierLot) },
-          { word: 'Received', figure: dayText(lot.receivedOn, today) },
+          {
+            word: lot.form === 'offcut' ? 'Its leather came on' : 'Received',
+            figure: dayText(lot.receivedOn, today),
+          },
           { word: 'Order', figure: <OrderLink lot={lot} /> },
           ...costs,
         ]}
