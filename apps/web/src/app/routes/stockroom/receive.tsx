@@ -80,8 +80,9 @@ interface ReceivingProps {
 }
 
 function Receiving({ asked, onReceived }: ReceivingProps) {
-  // As it was when the form was opened: what is received here must not pull the form away.
+  // As it was last looked at, not as it is: neither what is received here nor what others receive pulls the form away.
   const [order, setOrder] = useState(asked);
+  const [isOver] = useState(asked !== null && !isAwaited(asked));
   const [search] = useSearchParams();
   const { today } = useWorkshop();
   const { isOwner } = useRole();
@@ -90,7 +91,7 @@ function Receiving({ asked, onReceived }: ReceivingProps) {
   const { data: workshop } = useSuspenseQuery(workshopQuery());
   if (leathers.items.length + hardware.items.length === 0)
     return <NothingToReceive isOwner={isOwner} />;
-  if (order && order.state !== 'sent' && order.state !== 'part received') {
+  if (order && isOver) {
     return <EmptyState title={`${order.number} is ${order.state}: nothing of it is awaited.`} />;
   }
 
@@ -116,6 +117,9 @@ function Receiving({ asked, onReceived }: ReceivingProps) {
     </div>
   );
 }
+
+const isAwaited = ({ state }: PurchaseOrder): boolean =>
+  state === 'sent' || state === 'part received';
 
 /** Without an order; begun from a leather or from hardware, it has that in it. */
 function directly(search: URLSearchParams, today: string) {

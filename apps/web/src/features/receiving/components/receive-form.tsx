@@ -41,7 +41,10 @@ export function ReceiveForm(props: ReceiveFormProps) {
     try {
       props.onReceived(await send.mutateAsync({ body }));
     } catch (error) {
-      setBeaten(error instanceof ApiProblem && error.allowed.includes('look again'));
+      const isBeaten = error instanceof ApiProblem && error.allowed.includes('look again');
+      setBeaten(isBeaten);
+      // What is still to come stands beside each line, so it is read again; where it cannot be, the answer still stands.
+      if (isBeaten) await props.onLookAgain().catch(() => undefined);
       throw error;
     }
   }
