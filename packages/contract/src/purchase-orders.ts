@@ -129,6 +129,8 @@ export const purchaseLine = z
     /** Of leather: what was ordered and what came. */
     areaMm2: z.string().nullable(),
     receivedAreaMm2: z.string().nullable(),
+    /** Where what came is counted by its marks and measured otherwise, what was measured. */
+    measuredAreaMm2: z.string().nullable(),
     /** Of leather that comes out even in what it is bought as: so many sides. */
     whole: z.object({ count: z.int(), form: z.string() }).nullable(),
     /** Of hardware: what was ordered and what came. */
@@ -170,6 +172,8 @@ export const purchaseOrder = z
     arrivesOn: z.string().nullable(),
     /** The day on which the next of what is still to come is awaited; null where nothing is. */
     awaitedOn: z.string().nullable(),
+    /** Why, by whom and when it was cancelled; null where it was not. */
+    cancellation: z.object({ at: z.string(), by: z.string(), why: z.string() }).nullable(),
     note: z.string(),
     /** Of one that the check drafted, the runs that it is for; its supplier is not told. */
     draftedFor: z.string(),

@@ -32,6 +32,14 @@ export function paidOf(paid: Paid, line: PurchaseLine): { paid: string; priceDif
   return { paid: moneyText(goods), priceDifference: moneyText(goods.minus(asOrdered)) };
 }
 
+/** Thousandths of mm² that were measured of what came, where its marks say otherwise; else null. */
+export function measuredOf(paid: Paid, { id, received, service }: PurchaseLine): number | null {
+  const came = paid.get(id) ?? [];
+  if (service !== null || came.every(({ markedAreaMm2 }) => markedAreaMm2 === null)) return null;
+  const measured = came.reduce((sum, { quantity }) => sum + quantity, 0);
+  return measured === received ? null : measured;
+}
+
 function atOrderedPrice(row: ReceiptLine, line: PurchaseLine): Decimal {
   const { leatherId, unitPrice } = line;
   const quantity = row.markedAreaMm2 === null ? row.quantity : scaled(row.markedAreaMm2, 3);

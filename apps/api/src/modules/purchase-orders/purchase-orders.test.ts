@@ -230,7 +230,10 @@ describe('an order to a supplier', () => {
       .set('If-Match', '"2"')
       .send({ note: 'x' });
     expect(late.status).toBe(409);
-    expect((await cancel(order.id).expect(201)).body.state).toBe('cancelled');
+    expect((await cancel(order.id).expect(201)).body).toMatchObject({
+      state: 'cancelled',
+      cancellation: { by: 'The owner', why: 'Too late for us', at: '2026-12-01T09:00:00.000Z' },
+    });
     await cancel(order.id).expect(409);
     await send(order.id).expect(409);
   });

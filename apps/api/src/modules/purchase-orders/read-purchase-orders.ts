@@ -8,11 +8,12 @@ import type { Work } from '../../work.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { lineProgress } from '@hidewright/domain';
 import { readArticleNumbers, type ArticleNumberOf } from './article-numbers.ts';
+import { readCancellations, type Cancellations } from './cancellations.ts';
 import { readDraftArrivals } from './draft-arrivals.ts';
 import { lineAmount } from './line-amount.ts';
 import { nameOf, readLineNames, serviceOf, wholeOf, type LineNames } from './line-names.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
-import { paidOf, readPaid, type Paid } from './paid-for-lines.ts';
+import { measuredOf, paidOf, readPaid, type Paid } from './paid-for-lines.ts';
 import { PurchaseOrder } from './purchase-order.entity.ts';
 import { readSentBack, type SentBackOfLines } from './sent-back-of-lines.ts';
 
@@ -33,6 +34,7 @@ export async function readPurchaseOrderList(
   const articleNumberOf = await readArticleNumbers(em, orders, lines);
   const paid = await readPaid(em, lines);
   const arrivals = await readDraftArrivals(work, orders);
+  const cancellations = await readCancellations(em, orders);
   const sentBack = await readSentBack(
     em,
     orders.map((order) => order.id),
@@ -45,6 +47,7 @@ export async function readPurchaseOrderList(
       articleNumberOf,
       paid,
       arrivals,
+      cancellations,
       sentBack,
     });
   });
@@ -69,6 +72,7 @@ interface Known {
   articleNumberOf: ArticleNumberOf;
   paid: Paid;
   arrivals: ReadonlyMap<number, string>;
+  cancellations: Cancellations;
   sentBack: SentBackOfLines;
 }
 
@@ -90,6 +94,7 @@ function toReply(
     expectedOn: order.expectedOn,
     arrivesOn: known.arrivals.get(order.id) ?? null,
     awaitedOn: awaitedOn(order, lines),
+    cancellation: known.cancellations.get(order.id) ?? null,
     note: order.note,
     draftedFor: order.draftedFor,
     lines: lines.map((line) => toLine(line, order, known)),
@@ -107,6 +112,7 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, known: Known): LineRep
   const goods = (quantity: number) => ({ areaMm2: area(quantity), quantity: pieces(quantity) });
   const { toCome, over, short } = progressOf(line, order);
   const sentBack = known.sentBack.get(line.id);
+  const measured = measuredOf(paid, line);
   return {
     id: line.id,
     position: line.position,
@@ -117,6 +123,7 @@ function toLine(line: PurchaseLine, order: PurchaseOrder, known: Known): LineRep
     service: serviceOf(line, order, names),
     areaMm2: area(line.quantity),
     receivedAreaMm2: area(line.received),
+    measuredAreaMm2: measured === null ? null : area(measured),
     whole: wholeOf(line, names),
     quantity: pieces(line.quantity),
     received: pieces(line.received),

@@ -1,21 +1,27 @@
 import type { PurchaseLine } from '@hidewright/contract';
 import type { AreaHabit } from '@hidewright/domain';
-import { dayText } from '../../lib/formatting.ts';
+import { dayText, rackAreaText } from '../../lib/formatting.ts';
 import { goodsText } from './goods-text.ts';
 
 type Habit = AreaHabit & { today: string };
 
 interface ReceivedWords {
   came: string;
+  /** by its marks, 58.2 ft² measured */
+  measured: string | undefined;
   /** 20 sent back on Thu 3 Dec */
   sentBack: string | undefined;
 }
 
 /** What came of a line in words, and what of it went back. */
 export function receivedWords(line: PurchaseLine, workshop: Habit): ReceivedWords {
-  const { receivedAreaMm2, received, unit } = line;
+  const { receivedAreaMm2, measuredAreaMm2, received, unit } = line;
   return {
     came: goodsText({ areaMm2: receivedAreaMm2, quantity: received }, workshop, unit),
+    measured:
+      measuredAreaMm2 === null
+        ? undefined
+        : `by its marks, ${rackAreaText(measuredAreaMm2, workshop)} measured`,
     sentBack: sentBackWords(line, workshop),
   };
 }

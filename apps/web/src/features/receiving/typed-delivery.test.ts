@@ -9,6 +9,7 @@ const none = {
   areaMm2: null,
   articleNumber: '',
   receivedAreaMm2: null,
+  measuredAreaMm2: null,
   whole: null,
   quantity: null,
   received: null,

@@ -1,6 +1,7 @@
 import type { Order } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
+import { CancelledNotice } from '../../../components/cancelled-notice.tsx';
 import { Card } from '../../../components/card.tsx';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { LinkButton } from '../../../components/link-button.tsx';
@@ -10,7 +11,6 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { CutFromCard } from '../../../features/lots/components/cut-from-card.tsx';
 import { Arrivals } from '../../../features/orders/components/arrivals.tsx';
 import { CancelOrder } from '../../../features/orders/components/cancel-order.tsx';
-import { CancelledNotice } from '../../../features/orders/components/cancelled-notice.tsx';
 import { ChangesCard } from '../../../features/orders/components/changes-card.tsx';
 import { MoveDay } from '../../../features/orders/components/move-day.tsx';
 import { OrderFigures } from '../../../features/orders/components/order-figures.tsx';
@@ -42,7 +42,7 @@ export function Component() {
         }
       />
       <CancelledNotice
-        order={order}
+        cancellation={order.cancellation}
         actions={
           role === 'owner' && (
             <LinkButton

@@ -1,6 +1,7 @@
 import type { PurchaseOrder } from '@hidewright/contract';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useLoaderData, type LoaderFunctionArgs } from 'react-router-dom';
+import { CancelledNotice } from '../../../components/cancelled-notice.tsx';
 import { Card } from '../../../components/card.tsx';
 import { PageTitle } from '../../../components/page-title.tsx';
 import { RouteError } from '../../../components/route-error.tsx';
@@ -47,6 +48,7 @@ export function Component() {
           />
         }
       />
+      <CancelledNotice cancellation={order.cancellation} />
       <Card
         title="What is ordered"
         aside={

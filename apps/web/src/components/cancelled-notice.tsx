@@ -1,19 +1,19 @@
 import type { Order } from '@hidewright/contract';
 import type { ReactNode } from 'react';
-import { Notice } from '../../../components/notice.tsx';
-import { instantText } from '../../../lib/formatting.ts';
-import { useWorkshop } from '../../../lib/workshop.tsx';
+import { instantText } from '../lib/formatting.ts';
+import { useWorkshop } from '../lib/workshop.tsx';
+import { Notice } from './notice.tsx';
 
 interface CancelledNoticeProps {
-  order: Order;
+  /** Null where it was not cancelled. */
+  cancellation: Order['cancellation'];
   /** What can still be done. */
   actions?: ReactNode | undefined;
 }
 
-/** Why it was cancelled, by whom and when. */
-export function CancelledNotice({ order, actions }: CancelledNoticeProps) {
+/** Why an order was cancelled, by whom and when. */
+export function CancelledNotice({ cancellation, actions }: CancelledNoticeProps) {
   const { timeZone } = useWorkshop();
-  const { cancellation } = order;
   if (cancellation === null) return null;
   return (
     <Notice tone="info" title="Cancelled:" actions={actions}>
