@@ -226,6 +226,7 @@ describe('leather that is short of its mark', () => {
     expect(body.purchaseOrder).toMatchObject({ state: 'received', awaitedOn: null });
     expect(body.purchaseOrder.lines[0]).toMatchObject({
       receivedAreaMm2: '3716121.6',
+      measuredAreaMm2: '3576767.04',
       toCome: { areaMm2: '0' },
       short: { areaMm2: '0' },
     });

@@ -153,6 +153,7 @@ describe('receiving for an order', () => {
     expect(second.body.purchaseOrder).toMatchObject({ state: 'received' });
     expect(second.body.purchaseOrder.lines[0]).toMatchObject({
       receivedAreaMm2: '4598700.48',
+      measuredAreaMm2: null,
       areaMm2: '3716121.6',
     });
   });
