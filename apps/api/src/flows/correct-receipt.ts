@@ -9,6 +9,7 @@ import { readOneReceipt } from '../modules/receipts/read-receipts.ts';
 import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
 import { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { receiveStock, undoReceipt } from '../modules/stock/stock-ledger.ts';
+import { sayDay } from '../say-day.ts';
 import type { Work } from '../work.ts';
 import { carriageOf } from './receive/price-delivery.ts';
 import { cameWith } from './receive/put-on-rack.ts';
@@ -43,7 +44,7 @@ export async function correctReceipt(
   for (const line of lines) await putBack(work, receipt, line);
   await raiseVersion(work, receipt, readVersion);
   await logDeed(work, {
-    action: `put right what the delivery of ${receipt.receivedOn} cost`,
+    action: `put right what the delivery of ${sayDay(receipt.receivedOn)} cost`,
     subjectKind: 'delivery',
     subjectId: receipt.id,
     detail: { changed: Object.keys(typed) },

@@ -1,7 +1,7 @@
 import type { PurchaseLineTyped } from '@hidewright/contract';
 import { draftPurchaseOrder } from '../modules/purchase-orders/draft-purchase-order.ts';
 import type { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
-import { sayDay } from '../modules/quotes/say-day.ts';
+import { sayDay } from '../say-day.ts';
 import type { Work } from '../work.ts';
 import { buyingNotes, customersBring } from './check/buying-notes.ts';
 import type { CheckedRun, CheckedRuns } from './check/checked-runs.ts';

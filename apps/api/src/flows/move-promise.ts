@@ -5,7 +5,7 @@ import { movedLetter } from '../modules/orders/order-letters.ts';
 import type { Order } from '../modules/orders/order.entity.ts';
 import { allowedFor } from '../modules/orders/order-states.ts';
 import { PromiseMove } from '../modules/orders/promise-move.entity.ts';
-import { sayDay } from '../modules/quotes/say-day.ts';
+import { sayDay } from '../say-day.ts';
 import type { Work } from '../work.ts';
 import { requireReachable } from './check/runs-asked.ts';
 import { tellCustomer, type Telling } from './order-changes/tell-customer.ts';

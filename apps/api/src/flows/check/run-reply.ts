@@ -16,7 +16,7 @@ import {
 import { Decimal } from 'decimal.js';
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
-import { sayDay } from '../../modules/quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import { sayRackArea } from '../../modules/stock/say-area.ts';
 import { Workshop } from '../../modules/workshop/workshop.entity.ts';
 import type { CheckedRun } from './checked-runs.ts';

@@ -4,7 +4,7 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { Customer } from '../../modules/customers/customer.entity.ts';
 import { Job } from '../../modules/jobs/job.entity.ts';
 import type { Order } from '../../modules/orders/order.entity.ts';
-import { sayDay } from '../../modules/quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import type { Work } from '../../work.ts';
 import { benchToday, openJobs, type OpenJob } from '../bench-load.ts';
 import { whyNotTold } from './tell-customer.ts';

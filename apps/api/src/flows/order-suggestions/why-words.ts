@@ -1,5 +1,5 @@
 import { dailyUse, type Dated } from '@hidewright/domain';
-import { sayDay } from '../../modules/quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import type { Suggested } from './suggest-orders.ts';
 
 /** How the shop says quantities of a thing: 1,250, or 24.5 ft². */

@@ -5,7 +5,7 @@ import { findLot } from '../../modules/lots/find-lot.ts';
 import { drawTag, requireFreeTag } from '../../modules/lots/lot-tags.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
 import type { PurchaseLine } from '../../modules/purchase-orders/purchase-line.entity.ts';
-import { sayDay } from '../../modules/quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import { receiveStock } from '../../modules/stock/stock-ledger.ts';
 import type { Work } from '../../work.ts';
 import type { LandedLine } from './price-delivery.ts';

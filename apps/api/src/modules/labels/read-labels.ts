@@ -2,7 +2,7 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { binTag, tagAddress } from '@hidewright/domain';
 import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import type { Label } from '../../papers/label-sheet-pdf.ts';
-import { sayDay } from '../quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import { sayArea } from '../stock/say-area.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 

@@ -1,4 +1,4 @@
-import { sayDay } from '../quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 
 export interface LetterAbout {
   order: { number: string; title: string; quantity: number; inHandsOn: string | null };

@@ -1,5 +1,6 @@
 import { lineProgress } from '@hidewright/domain';
 import { invalid, notFound, wrongState } from '../../http/problem.ts';
+import { sayDay } from '../../say-day.ts';
 import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { PurchaseLine } from './purchase-line.entity.ts';
@@ -30,7 +31,7 @@ export async function awaitLineOn(
   await work.em.nativeUpdate(PurchaseOrder, { id: order.id }, { note: order.note });
   await work.em.refresh(order);
   await logDeed(work, {
-    action: `awaits line ${line.position} of purchase order ${order.number} on ${expectedOn}`,
+    action: `awaits line ${line.position} of purchase order ${order.number} on ${sayDay(expectedOn)}`,
     subjectKind: 'purchase order',
     subjectId: order.id,
     detail: { line: line.position, from, to: expectedOn },

@@ -1,7 +1,7 @@
 import { countedWords, figureWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
-import { sayDay } from '../quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import { sayArea } from '../stock/say-area.ts';
 import { sayOrderedArea } from './ordered-area.ts';
 

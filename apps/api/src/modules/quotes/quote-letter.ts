@@ -1,5 +1,5 @@
 import type { QuotePaper } from '../../papers/quote-pdf.ts';
-import { sayDay } from './say-day.ts';
+import { sayDay } from '../../say-day.ts';
 
 /** The words that go with a quote, by mail or copied by hand. */
 export function quoteLetter(

@@ -1,6 +1,6 @@
 import type { draftClaim, ReplyOf } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
-import { sayDay } from '../quotes/say-day.ts';
+import { sayDay } from '../../say-day.ts';
 import { sayArea } from '../stock/say-area.ts';
 
 interface Claimed extends Omit<ReplyOf<typeof draftClaim>, 'text' | 'supplierEmail'> {
