@@ -5,7 +5,8 @@ const { run, up } = beforeMigrations();
 
 it('what a draft is for leaves its note to the supplier, and what was sent stays as it was', async () => {
   await up('migration-20261209-the-marks');
-  await run(`INSERT INTO supplier (id, name) VALUES (1, 'Fennbridge Fittings')`);
+  await run(`INSERT INTO supplier (id, name, email, phone, lead_days, note, active)
+    VALUES (1, 'Fennbridge Fittings', '', '', 5, '', 1)`);
   const order = (number: string, state: string, note: string) =>
     run(`INSERT INTO purchase_order (number, supplier_id, state, note, created_at)
       VALUES ('${number}', 1, '${state}', '${note}', '2026-12-01T09:00:00.000Z')`);

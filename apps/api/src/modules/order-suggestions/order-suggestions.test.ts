@@ -108,7 +108,7 @@ describe('what to order', () => {
     expect(await leather()).toMatchObject({
       ...{ state: 'now', unit: 'mm2', quantity: String(Number(ft2(22)) * 3), amount: '594.00' },
       ...{ whole: { areaMm2: ft2(22), form: 'side' }, point: ft2(50) },
-      why: 'None free, below the minimum of 50 ft². Order 66 ft² to fill it up.',
+      why: 'None free, below the minimum of 50.0 ft². Order 66.0 ft² to fill it up.',
     });
   });
 

@@ -13,6 +13,7 @@ const levels = stockLevels.parse({
   on: '2026-12-02',
   leathers: [],
   hardware: [],
+  kits: [],
   leatherAreaMm2: '0',
   leatherValue: '0.00',
   hardwareValue: '0.00',

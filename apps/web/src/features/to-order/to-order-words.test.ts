@@ -26,7 +26,7 @@ it('says quantities in their unit', () => {
   expect(amountText('2.54', { unit: 'm' }, workshop)).toBe('2.5 m');
   expect(amountText('12', { unit: 'pair' }, workshop)).toBe('12 pairs');
   expect(amountText('1', { unit: 'bottle' }, workshop)).toBe('1 bottle');
-  expect(amountText('2043866.88', { unit: 'mm2' }, workshop)).toBe('22 ft²');
+  expect(amountText('2043866.88', { unit: 'mm2' }, workshop)).toBe('22.0 ft²');
 });
 
 it('says what of it is held, and what of that is missing', () => {
@@ -40,7 +40,7 @@ it('says how it is sold, and how many sides that is', () => {
   expect(soldWords(item({ least: '500' }), workshop)).toBe('packs of 100, at least 500');
   expect(soldWords(item({ multiple: '1' }), workshop)).toBe('');
   const leather = { unit: 'mm2', multiple: side.areaMm2, whole: side };
-  expect(soldWords(item(leather), workshop)).toBe('whole sides of about 22 ft²');
+  expect(soldWords(item(leather), workshop)).toBe('whole sides of about 22.0 ft²');
   const belly = { ...side, form: 'belly' };
   expect(soldWords(item({ ...leather, whole: belly }), workshop)).toContain('whole bellies of');
   expect(wholeWords('6131600.64', { whole: belly } as never)).toBe('3 bellies');
