@@ -15,6 +15,13 @@ beforeAll(async () => {
   shop = await startTestShop();
 });
 afterAll(() => shop.close());
+const side = (more: object = {}) => ({
+  leatherId: things.leatherId,
+  purchaseLineId: order.leatherLine,
+  form: 'side',
+  measuredAreaMm2: ft2(24),
+  ...more,
+});
 beforeEach(async () => {
   things = await stockUp(shop);
   order = await orderMore(shop, things);
@@ -23,14 +30,7 @@ beforeEach(async () => {
     .post('/api/receipts')
     .send({
       purchaseOrderId: order.id,
-      lots: [
-        {
-          leatherId: things.leatherId,
-          purchaseLineId: order.leatherLine,
-          form: 'side',
-          measuredAreaMm2: ft2(24),
-        },
-      ],
+      lots: [side()],
       hardware: [
         { hardwareId: things.hardwareId, purchaseLineId: order.rivetLine, quantity: 1000 },
       ],
@@ -146,15 +146,7 @@ describe('what went back', () => {
       .post('/api/receipts')
       .send({
         purchaseOrderId: order.id,
-        lots: [
-          {
-            leatherId: things.leatherId,
-            purchaseLineId: order.leatherLine,
-            form: 'side',
-            markedAreaMm2: ft2(25),
-            measuredAreaMm2: ft2(24),
-          },
-        ],
+        lots: [side({ markedAreaMm2: ft2(25) })],
       })
       .expect(201);
     await shop

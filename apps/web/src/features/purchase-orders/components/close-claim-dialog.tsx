@@ -22,7 +22,7 @@ export function CloseClaimDialog({ claim, as, onClose }: CloseClaimDialogProps) 
       title={credited ? 'What did they credit?' : 'Give the claim up?'}
       description={
         credited
-          ? 'The lots keep what they cost: a credit is money, not leather.'
+          ? 'What came keeps what it cost: a credit is money, not goods.'
           : 'It stays with the order and cannot be taken up again.'
       }
     >

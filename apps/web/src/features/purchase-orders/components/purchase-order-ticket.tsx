@@ -12,8 +12,9 @@ interface PurchaseOrderTicketProps {
 
 export function PurchaseOrderTicket({ order, actions }: PurchaseOrderTicketProps) {
   const { currency, today, timeZone } = useWorkshop();
-  const { number, supplierName, sentAt, total } = order;
-  const expectedOn = order.awaitedOn ?? order.arrivesOn ?? order.expectedOn;
+  const { number, supplierName, state, sentAt, total } = order;
+  const told = state === 'cancelled' ? null : order.expectedOn;
+  const expectedOn = order.awaitedOn ?? order.arrivesOn ?? told;
   return (
     <Ticket
       level={1}
