@@ -8,6 +8,12 @@ function unit(name: string, root: string): TestProjectInlineConfiguration {
   return { test: { name, root, include: ['**/*.test.{ts,tsx}'], ...hang } };
 }
 
+/** Tests of what keeps nothing from one call to the next: reading it in once serves every file. */
+function pure(name: string, root: string): TestProjectInlineConfiguration {
+  const { test } = unit(name, root);
+  return { test: { ...test, isolate: false } };
+}
+
 /** Whole programs started as processes: one at a time, since each wants a core and a half. */
 function whole(name: string, root: string, include: string): TestProjectInlineConfiguration {
   return {
@@ -33,12 +39,12 @@ export default defineConfig({
   test: {
     maxWorkers: 2,
     projects: [
-      unit('domain', 'packages/domain'),
-      unit('contract', 'packages/contract'),
+      pure('domain', 'packages/domain'),
+      pure('contract', 'packages/contract'),
       unit('web', 'apps/web'),
       unit('stand-ins', 'apps/stand-ins'),
       unit('lint', 'tests/lint'),
-      unit('published', 'tests/published'),
+      pure('published', 'tests/published'),
       'apps/*/vitest.config.ts',
       walks,
       whole('commands', 'tests/commands', '**/*.test.ts'),
