@@ -29,6 +29,26 @@ describe('counting by weight', () => {
     expect(countByWeight({ ...weighing, allGrams: '25' }).count).toBe(0);
   });
 
+  it('says so where no whole number of pieces weighs that', () => {
+    // 15.9 g at 1.8 g each are 8.8 pieces, and a scale of 0.01 g is not that wrong.
+    const mixed = { sampleGrams: '18', allGrams: '35.9', tareGrams: '20', scaleStepGrams: '0.01' };
+    expect(countByWeight({ ...weighing, ...mixed })).toEqual({
+      count: 9,
+      atLeast: 8,
+      atMost: 9,
+      sentence:
+        'Between 8 and 9 pieces: no whole number weighs that. Empty the tub of anything else, and weigh both again.',
+    });
+    const walked = { sampleGrams: '18', allGrams: '179', tareGrams: '20' };
+    expect(countByWeight({ ...weighing, ...walked })).toMatchObject({ atLeast: 88, atMost: 89 });
+  });
+
+  it('gives no count that the scale would not have shown', () => {
+    const near = { sampleGrams: '1.0', allGrams: '8.45', tareGrams: '0', scaleStepGrams: '0.1' };
+    const { count, atLeast, atMost } = countByWeight({ ...weighing, ...near });
+    expect([atLeast <= count, count <= atMost]).toEqual([true, true]);
+  });
+
   it.each([
     [{ sampleCount: 0 }, 'sampleCount'],
     [{ sampleGrams: '0' }, 'sampleGrams'],

@@ -19,7 +19,7 @@ export interface Weighing {
 export interface WeighedCount {
   /** the nearest whole number of pieces */
   count: number;
-  /** the fewest and the most that would have shown the same on the scale */
+  /** the fewest and the most that would have shown the same on the scale; where none would, the whole numbers around */
   atLeast: number;
   atMost: number;
   /** says the count and how sure it is */
@@ -28,21 +28,26 @@ export interface WeighedCount {
 
 /**
  * How many pieces lie in a tub, by weighing a few and all: (all − tare) / (sample / count). Each reading may be half a
- * step of the scale off, which gives the fewest and the most; that pieces differ among themselves is not in it.
+ * step of the scale off, which gives the fewest and the most; that pieces differ among themselves is not in it. Where
+ * no whole number of pieces weighs that, it says so: something else lies in the tub, or a reading is wrong.
  * @throws InvalidInput
  */
 export function countByWeight(weighing: Weighing): WeighedCount {
   const { pieces, sample, all, tare, half } = read(weighing);
   const net = all.minus(tare);
   const each = sample.div(pieces);
-  const count = net.div(each).toDecimalPlaces(0).toNumber();
   // Two readings stand behind what all weigh where there is a tub.
   const slack = tare.isZero() ? half : half.times(2);
-  const least = Exact.max(0, net.minus(slack)).times(pieces).div(sample.plus(half));
-  const atLeast = Math.min(count, least.ceil().toNumber());
   if (sample.lte(half)) throw tooLight();
+  const least = Exact.max(0, net.minus(slack)).times(pieces).div(sample.plus(half));
   const most = net.plus(slack).times(pieces).div(sample.minus(half));
-  const atMost = Math.max(count, most.floor().toNumber());
+  const [atLeast, atMost] = [least.ceil().toNumber(), most.floor().toNumber()];
+  const nearest = net.div(each).toDecimalPlaces(0).toNumber();
+  if (atLeast > atMost) {
+    const around = { atLeast: atMost, atMost: atLeast };
+    return { count: nearest, ...around, sentence: sayNoneFits(around) };
+  }
+  const count = Math.min(Math.max(nearest, atLeast), atMost);
   return { count, atLeast, atMost, sentence: sayCount(count, atLeast, atMost) };
 }
 
@@ -66,6 +71,9 @@ function read({ sampleCount, sampleGrams, allGrams, tareGrams, scaleStepGrams }:
 
 const tooLight = () =>
   new InvalidInput('sampleGrams', 'That is too light for this scale. Weigh more pieces together.');
+
+const sayNoneFits = ({ atLeast, atMost }: Pick<WeighedCount, 'atLeast' | 'atMost'>): string =>
+  `Between ${countWords(atLeast)} and ${countWords(atMost)} pieces: no whole number weighs that. Empty the tub of anything else, and weigh both again.`;
 
 function sayCount(count: number, atLeast: number, atMost: number): string {
   const pieces = `${countWords(count)} ${count === 1 ? 'piece' : 'pieces'}`;

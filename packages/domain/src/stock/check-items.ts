@@ -6,7 +6,9 @@ import {
   drawFor,
   enoughFrom,
   freeBy,
+  overPromisedBy,
   type PromisePool,
+  servePromises,
 } from './promise-pool.ts';
 
 /** How one need stands; quantities in pieces, or in thousandths of mm². */
@@ -21,7 +23,9 @@ export interface Standing {
   enoughOn: Day | null;
   /** what must be bought for that day, beside what is on order */
   buy: number;
-  /** of that, what a draft holds already */
+  /** of that, what work promised before still lacks: it comes first, whoever buys */
+  forOthers: number;
+  /** of what must be bought, what a draft holds already */
   drafted: number;
   /** what comes from suppliers and is counted on */
   coming: Dated[];
@@ -46,7 +50,8 @@ interface Asked {
 
 /**
  * Draws what is needed by a day. Where that is too little, waiting for what is on order is weighed against buying
- * more: whichever is here sooner, and nothing is bought that comes in time anyhow.
+ * more: whichever is here sooner, and nothing is bought that comes in time anyhow. What is bought serves promises made
+ * before first, so it has to do for them as well.
  */
 export function drawOrMend(asked: Asked): { standing: Standing; left: PromisePool } {
   const { pool, buying, needed, day, today } = asked;
@@ -54,18 +59,25 @@ export function drawOrMend(asked: Asked): { standing: Standing; left: PromisePoo
   const waits = comesOn !== null && (buying.arrivesOn === null || comesOn <= buying.arrivesOn);
   const drawn = drawFor(pool, day, needed, waits ? null : buying.arrivesOn);
   const inTime = drawn.inTime === needed;
+  const forOthers = drawn.lacking === 0 ? 0 : overPromisedBy(pool, here(day, buying.arrivesOn));
+  const buy = drawn.lacking + forOthers;
   const standing = {
     needed,
     now: drawn.now,
     free: freeBy(pool, day),
     short: needed - drawn.inTime,
     enoughOn: inTime || waits ? comesOn : buying.arrivesOn,
-    buy: drawn.lacking,
-    drafted: Math.min(drawn.lacking, buying.drafted),
+    buy,
+    forOthers,
+    drafted: Math.min(buy, buying.drafted),
     coming: comingWith(pool, drawn, day),
   };
-  return { standing, left: drawn.left };
+  return { standing, left: servePromises(drawn.left, forOthers) };
 }
+
+/** When what is needed by a day and bought now can be had; null where nobody can tell. */
+const here = (day: Day, arrivesOn: Day | null): Day | null =>
+  arrivesOn !== null && arrivesOn < day ? day : arrivesOn;
 
 /** The papers that bring what is drawn beyond what is free now. */
 function comingWith({ receipts }: PromisePool, { now, inTime, later }: Drawn, day: Day): Dated[] {
@@ -80,7 +92,7 @@ export function drawItem(
 ): { facts: ItemFacts; left: ItemStock } {
   const { pool, buying } = item;
   const { standing, left } = drawOrMend({ pool, buying, needed: quantity, day, today });
-  const bought = item.fromCustomer ? { ...standing, buy: 0, drafted: 0 } : standing;
+  const bought = item.fromCustomer ? { ...standing, buy: 0, forOthers: 0, drafted: 0 } : standing;
   return {
     facts: { ...bought, item, forLosses: quantity - ordered, couldStandIn: [] },
     left: { ...item, pool: left, buying: lessDrafted(buying, bought.drafted) },

@@ -217,6 +217,20 @@ describe('Can we make it?', () => {
     expect(checkRuns(stock, [run(60)])[0]!.items[0]).toMatchObject({ free: 50, short: 10 });
   });
 
+  it('buys for what was promised before as well, once, since it comes first', () => {
+    const promised = [{ day: '2026-12-05', quantity: 50, paper: 'J-0026 Snap tags' }];
+    const stock = shop({ items: [rivets(0, { pool: { free: 0, receipts: [], promised } })] });
+    const [first, second] = checkRuns(stock, [run(90), run(30)]);
+    expect(first!.items[0]).toMatchObject({ short: 90, buy: 140, forOthers: 50 });
+    expect(second!.items[0]).toMatchObject({ short: 30, buy: 30, forOthers: 0 });
+    expect(hardwareWords(first!.items[0]!, say)).toBe(
+      'Rivet: 90 needed, 0 free, 90 short. 50 more are lacking for what was promised before. Buy 2 packs of 100, or receive them if they are here. Ordered from Fennbridge Fittings today, it is here by 2026-12-04.',
+    );
+    const receipts = [{ day: '2026-12-04', quantity: 140 }];
+    const bought = shop({ items: [rivets(0, { pool: { free: 0, receipts, promised } })] });
+    expect(checkRuns(bought, [run(90)])[0]!.items[0]).toMatchObject({ short: 0, buy: 0 });
+  });
+
   it('says which draft holds what is short', () => {
     const drafted = { ...fittings, drafted: 100, drafts: ['P-0012'] };
     const [facts] = checkRuns(shop({ items: [rivets(0, { buying: drafted })] }), [run(90)]);

@@ -37,6 +37,7 @@ export function hardwareWords({ item, ...standing }: ItemFacts, say: Say): strin
   return [
     head,
     ...losses,
+    ...othersWords(standing.forOthers, pieces),
     ...remedy(standing, item.buying, missing > 0 ? buyWords(item, missing) : null, say),
     ...standInWords({ item, ...standing }),
   ].join(' ');
@@ -48,6 +49,10 @@ function lossWords({ item, needed, forLosses }: ItemFacts): string[] {
   const are = forLosses === 1 ? 'is' : 'are';
   return [`${countedIn(item)(forLosses)} of the ${countWords(needed)} ${are} for losses.`];
 }
+
+/** Why more is to be bought than is short. */
+const othersWords = (forOthers: number, say: (quantity: number) => string): string[] =>
+  forOthers === 0 ? [] : [`${say(forOthers)} more are lacking for what was promised before.`];
 
 const countedIn =
   ({ unit = 'piece' }: ItemFacts['item']) =>
@@ -117,7 +122,10 @@ export function leatherWords(facts: LeatherFacts, say: Say): string {
   const missing = standing.buy - standing.drafted;
   const buy = missing > 0 ? buyLeatherWords(leather, missing, say) : null;
   const small = smallWords(facts);
-  return [head, ...small, ...remedy(standing, leather.buying, buy, say), ...shades].join(' ');
+  const others = othersWords(standing.forOthers, area);
+  return [head, ...small, ...others, ...remedy(standing, leather.buying, buy, say), ...shades].join(
+    ' ',
+  );
 }
 
 /** Why leather that hangs there is not counted as free. */

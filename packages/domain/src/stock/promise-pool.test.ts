@@ -1,6 +1,14 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { type Dated, drawFor, enoughFrom, freeBy, type PromisePool } from './promise-pool.ts';
+import {
+  type Dated,
+  drawFor,
+  enoughFrom,
+  freeBy,
+  overPromisedBy,
+  type PromisePool,
+  servePromises,
+} from './promise-pool.ts';
 
 const dayAt = (days: number) => `2026-12-${String(days).padStart(2, '0')}`;
 const dated = fc.array(
@@ -52,6 +60,33 @@ describe('freeBy', () => {
     expect([freeBy(pool, null), freeBy(pool, dayAt(8))]).toEqual([10, 10]);
     expect(enoughFrom(pool, 10, dayAt(1))).toBe(dayAt(1));
     expect(enoughFrom(pool, 11, dayAt(1))).toBeNull();
+  });
+});
+
+describe('overPromisedBy', () => {
+  it('is what must come by that day before anything is free, and nothing more', () => {
+    fc.assert(
+      fc.property(pools, days, fc.integer({ min: 1, max: 60 }), (pool, day, quantity) => {
+        const over = overPromisedBy(pool, day);
+        fc.pre(over > 0);
+        const bought = (more: number) => ({
+          ...pool,
+          receipts: [...pool.receipts, { day, quantity: more }],
+        });
+        expect(freeBy(bought(over + quantity), day)).toBe(quantity);
+        expect(freeBy(servePromises(pool, over), day)).toBe(0);
+        expect(overPromisedBy(servePromises(pool, over), day)).toBe(0);
+      }),
+    );
+  });
+
+  it('counts everything on order where no day is known', () => {
+    const pool = {
+      free: 10,
+      receipts: [{ day: dayAt(9), quantity: 20 }],
+      promised: [{ day: dayAt(2), quantity: 45 }],
+    };
+    expect([overPromisedBy(pool, dayAt(2)), overPromisedBy(pool, null)]).toEqual([35, 15]);
   });
 });
 

@@ -25,6 +25,39 @@ export interface PromisePool {
  * @param day null for now, before anything else comes
  */
 export function freeBy(pool: PromisePool, day: Day | null): number {
+  return Math.max(0, netBy(pool, day));
+}
+
+/**
+ * How much more is promised than will be there from a day on: whatever is bought for that day goes to those promises
+ * first. 0 where all of them can be kept.
+ * @param day null for when everything on order has come
+ */
+export function overPromisedBy(pool: PromisePool, day: Day | null): number {
+  return Math.max(0, -netBy(pool, day ?? lastDay(pool)));
+}
+
+const lastDay = ({ receipts, promised }: PromisePool): Day | null =>
+  [...receipts, ...promised].reduce<Day | null>(
+    (last, { day }) => (last === null || day > last ? day : last),
+    null,
+  );
+
+/** Those who were promised first get so much of what is bought, and wait for nothing more of it. */
+export function servePromises(pool: PromisePool, quantity: number): PromisePool {
+  let left = quantity;
+  const promised = [...pool.promised]
+    .sort((a, b) => (a.day < b.day ? -1 : Number(a.day > b.day)))
+    .map((each) => {
+      const served = Math.min(left, each.quantity);
+      left -= served;
+      return { ...each, quantity: each.quantity - served };
+    });
+  return { ...pool, promised: promised.filter((each) => each.quantity > 0) };
+}
+
+/** The least that will be there from a day on, below 0 where more is promised. */
+function netBy(pool: PromisePool, day: Day | null): number {
   const days = [...pool.receipts, ...pool.promised].map((each) => each.day);
   const periods = [null, ...[...new Set(days)].sort()];
   const available = availableToPromise({
@@ -32,12 +65,11 @@ export function freeBy(pool: PromisePool, day: Day | null): number {
     receipts: periods.map((each) => sumOn(pool.receipts, each)),
     orders: periods.map((each) => sumOn(pool.promised, each)),
   });
-  const free = periods.reduce(
+  return periods.reduce(
     (sum, each, at) =>
       each === null || (day !== null && each <= day) ? sum + (available[at] ?? 0) : sum,
     0,
   );
-  return Math.max(0, free);
 }
 
 const sumOn = (all: readonly Dated[], day: Day | null): number =>

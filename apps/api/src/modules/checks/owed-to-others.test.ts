@@ -83,6 +83,9 @@ it('what was held and is not there is owed to the job that goes without', async 
     ({ name }) => name === 'Rivet 9 mm',
   );
   expect(rivets?.why).toMatch(/^50 missing for J-0001 [^.]+\. None free, below /);
+  expect((await foundBy('2026-12-30'))?.sentence).toMatch(
+    /^Rivet 9 mm: 100 needed, 0 free, 100 short\. 50 more are lacking for what was promised before\. Buy 2 packs of 100\b/,
+  );
   await awaitRivets(100, '2026-12-08');
   expect(await foundBy('2026-12-30')).toMatchObject({ free: '50', short: '50' });
 });
