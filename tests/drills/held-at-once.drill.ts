@@ -65,10 +65,12 @@ describe('fifty people who hold the last ten lots at once', () => {
   it('[I2] get ten of them, and the others hear what is free', { timeout: 3_600_000 }, async () => {
     const played = await drill(`${folder}/sound`, { times: rounds, people });
     expect(played.map(({ held }) => held)).toEqual(played.map(() => lots));
-    for (const { refusals } of played) {
-      expect(refusals.every(({ status }) => status === 409)).toBe(true);
-      expect(refusals.every(({ detail }) => detail.startsWith('There is 0 ft² of lot'))).toBe(true);
-    }
+    const saidWhatIsFree = ({ status, detail }: Round['refusals'][number]) =>
+      status === 409 && detail.startsWith('There is 0 ft² of lot');
+    const others = played.flatMap(({ refusals }) =>
+      refusals.filter((each) => !saidWhatIsFree(each)),
+    );
+    expect(others).toEqual([]);
     const args = [path.join(root, 'scripts', 'verify.mjs'), `${folder}/sound`];
     const { stdout } = await verify(process.execPath, args, { cwd: root });
     expect(stdout).toContain('holds');

@@ -27,6 +27,16 @@ const point = 72 / 25.4;
 /** White that a code needs around it, in its own modules, as ISO/IEC 18004 asks. */
 const quiet = 4;
 const insideMm = 2;
+const aboveMm = insideMm + 1;
+/** Of the size of the name's line. */
+const [tagSize, plainSize] = [1.6, 0.9];
+const leading = 1.365;
+
+/** The size in points at which a tag, a name and so many lines below them stand whole within a label. */
+export function lineSize(heightMm: number, lines: number): number {
+  const height = (heightMm - aboveMm - insideMm) * point;
+  return Math.min(11, height / (leading * (tagSize + 1 + plainSize * lines)));
+}
 
 /** Draws tags at their places, true to size; the same tags always give the same bytes. */
 export function drawLabels(sheet: LabelSheet): Promise<Uint8Array> {
@@ -58,19 +68,19 @@ function drawLabel(paper: Paper, label: Label, { xMm, yMm, widthMm, heightMm }: 
   });
   const left = (xMm + insideMm + codeMm + 1) * point;
   const width = (widthMm - codeMm - 2 * insideMm - 1) * point;
-  const line = Math.min(11, (heightMm * point) / (label.lines.length + 4.5));
-  let top = (yMm + insideMm + 1) * point;
+  const line = lineSize(heightMm, label.lines.length);
+  let top = (yMm + aboveMm) * point;
   const put = (text: string, size: number, font: 'plain' | 'strong') => {
     paper
       .font(font)
       .fontSize(size)
       .fillColor(font === 'strong' ? ink : inkSoft);
     paper.text(text, left, top, { width, height: size * 1.4, ellipsis: true, lineBreak: false });
-    top += size * 1.36;
+    top += size * leading;
   };
-  put(label.tag, line * 1.6, 'strong');
+  put(label.tag, line * tagSize, 'strong');
   put(label.name, line, 'strong');
-  for (const each of label.lines) put(each, line * 0.9, 'plain');
+  for (const each of label.lines) put(each, line * plainSize, 'plain');
   paper.restore();
 }
 

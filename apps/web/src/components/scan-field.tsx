@@ -15,6 +15,10 @@ interface ScanFieldProps {
   error?: string | undefined;
 }
 
+/** What was read is longer than any tag, such as the code of a web page. */
+export const noTagWords =
+  'That is no tag of this workshop. Scan the one on the lot, bin, order or ticket, or type it, such as T-0012.';
+
 /**
  * Where a tag is read: a hand scanner types into it and ends with Enter, as a person may, and a button opens the
  * camera. It stands outside or inside a form without sending it.
@@ -23,10 +27,13 @@ export function ScanField({ label, onScan, help, error }: ScanFieldProps) {
   const id = useId();
   const [typed, setTyped] = useState('');
   const [camera, setCamera] = useState(false);
+  const [isNoTag, setIsNoTag] = useState(false);
+  const wrong = isNoTag ? noTagWords : error;
 
   function read(text: string) {
     const tag = scannedTag(text);
     setTyped('');
+    setIsNoTag(tag === undefined && text.trim() !== '');
     if (tag !== undefined) onScan(tag);
   }
 
@@ -41,7 +48,7 @@ export function ScanField({ label, onScan, help, error }: ScanFieldProps) {
       <Field id={id} label={label} help={help}>
         <div className="flex flex-wrap gap-2">
           <div className="min-w-0 grow basis-44">
-            <InputFrame id={id} invalid={error !== undefined}>
+            <InputFrame id={id} invalid={wrong !== undefined}>
               <input
                 id={id}
                 type="text"
@@ -50,8 +57,8 @@ export function ScanField({ label, onScan, help, error }: ScanFieldProps) {
                 autoCapitalize="characters"
                 spellCheck={false}
                 enterKeyHint="go"
-                aria-invalid={error !== undefined}
-                aria-describedby={error === undefined ? undefined : `${id}-read`}
+                aria-invalid={wrong !== undefined}
+                aria-describedby={wrong === undefined ? undefined : `${id}-read`}
                 onChange={(event) => setTyped(event.target.value)}
                 onKeyDown={onKeyDown}
                 className={`${inputLook} min-h-11`}
@@ -72,7 +79,7 @@ export function ScanField({ label, onScan, help, error }: ScanFieldProps) {
         </div>
       </Field>
       <p id={`${id}-read`} role="alert" className="font-semibold text-oxblood empty:hidden">
-        {error}
+        {wrong}
       </p>
       {camera && <CameraScanner onRead={read} />}
     </div>

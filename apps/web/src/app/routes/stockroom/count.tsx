@@ -79,8 +79,9 @@ function LeftShort({ sheet }: { sheet: StockCount }) {
   if (!sheet.broken || sheet.broken.length === 0) return null;
   return (
     <Notice tone="attention" title="Less is there than jobs hold.">
-      Once this is approved, one of these runs short; order more, or move one of them.
-      <HeldLines held={sheet.broken} mayOpenJobs />
+      Once this is approved, one of the jobs that share a thing here runs short: order more of it,
+      or move a job.
+      <HeldLines held={sheet.broken} mayOpenJobs namesThings />
     </Notice>
   );
 }

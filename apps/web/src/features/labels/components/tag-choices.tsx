@@ -11,7 +11,7 @@ interface TagChoicesProps {
   choices: readonly TagChoice[];
   chosen: readonly number[];
   onChoose: (ids: readonly number[]) => void;
-  /** A few of them at once, such as those received today. */
+  /** A few of them at once, such as those received today; they join what is chosen. */
   groups: readonly { word: string; ids: readonly number[] }[];
 }
 
@@ -24,7 +24,7 @@ export function TagChoices({ legend, choices, chosen, onChoose, groups }: TagCho
         {groups
           .filter(({ ids }) => ids.length > 0)
           .map(({ word, ids }) => (
-            <Button key={word} onClick={() => onChoose(ids)}>
+            <Button key={word} onClick={() => onChoose([...new Set([...chosen, ...ids])])}>
               {`${word} (${ids.length})`}
             </Button>
           ))}

@@ -6,18 +6,22 @@ import { Button } from '../../../components/button.tsx';
 import { CameraScanner } from '../../../components/camera-scanner.tsx';
 import { describedBy, Field } from '../../../components/field.tsx';
 import { InputFrame, inputLook } from '../../../components/input-frame.tsx';
+import { noTagWords } from '../../../components/scan-field.tsx';
 import { useField } from '../../../components/use-field.ts';
 
 /** The tag of a lot: drawn by itself, typed, or read off one that hangs on it already. */
 export function TagField({ name }: { name: string }) {
-  const { setValue } = useFormContext();
+  const { setValue, setError } = useFormContext();
   const { id, register, error } = useField(name);
   const [camera, setCamera] = useState(false);
 
   function read(text: string) {
     const tag = scannedTag(text);
-    if (tag === undefined) return;
-    setValue(name, tag, { shouldDirty: true });
+    if (tag === undefined) {
+      setError(name, { message: noTagWords });
+      return;
+    }
+    setValue(name, tag, { shouldDirty: true, shouldValidate: true });
     setCamera(false);
   }
 

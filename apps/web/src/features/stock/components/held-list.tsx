@@ -19,13 +19,14 @@ export function HeldList({ item, mayOpenJobs }: HeldListProps) {
   return <HeldLines held={data.items} mayOpenJobs={mayOpenJobs} />;
 }
 
-export function HeldLines({
-  held,
-  mayOpenJobs,
-}: {
+interface HeldLinesProps {
   held: readonly StockReservation[];
   mayOpenJobs: boolean;
-}) {
+  /** Where several things are listed together, each line says which. */
+  namesThings?: boolean;
+}
+
+export function HeldLines({ held, mayOpenJobs, namesThings = false }: HeldLinesProps) {
   const workshop = useWorkshop();
   return (
     <ul className="space-y-1">
@@ -36,7 +37,10 @@ export function HeldLines({
           ) : (
             <span>{row.jobNumber}</span>
           )}
-          <span>{quantityText(row, workshop)}</span>
+          <span className="text-right">
+            {quantityText(row, workshop)}
+            {namesThings && ` of ${row.lotTag ?? row.hardwareName ?? ''}`}
+          </span>
         </li>
       ))}
     </ul>
