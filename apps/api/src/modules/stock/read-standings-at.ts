@@ -2,7 +2,10 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import type { DayOver } from '../../day-in.ts';
 import { standingsOf, type Promised, type Standings } from './standings.ts';
 
-/** Everything that was there, held and awaited at the end of the day. */
+/**
+ * Everything that was there, held and awaited at the end of the day. A delivery that was written down on a later day than
+ * it came was awaited until then, as the ledger has it on the rack from then.
+ */
 const then = `WITH
   asked (day, over) AS (SELECT ?, ?),
   there AS (SELECT lot_id, hardware_id, SUM(quantity) AS quantity FROM stock_movement, asked
@@ -12,7 +15,7 @@ const then = `WITH
     WHERE m.day <= asked.day GROUP BY r.lot_id, r.hardware_id),
   came AS (SELECT l.purchase_line_id AS id, SUM(COALESCE(l.marked_area_mm2, l.quantity)) AS quantity
     FROM asked, receipt_line l JOIN receipt t ON t.id = l.receipt_id
-    WHERE t.received_on <= asked.day AND l.purchase_line_id IS NOT NULL GROUP BY l.purchase_line_id),
+    WHERE t.at < asked.over AND l.purchase_line_id IS NOT NULL GROUP BY l.purchase_line_id),
   awaited AS (SELECT l.leather_id, l.hardware_id, SUM(MAX(0, l.quantity - COALESCE(came.quantity, 0))) AS quantity
     FROM asked, purchase_line l JOIN purchase_order p ON p.id = l.purchase_order_id LEFT JOIN came ON came.id = l.id
     WHERE p.sent_at < asked.over AND (l.awaited_until IS NULL OR l.awaited_until > asked.day)

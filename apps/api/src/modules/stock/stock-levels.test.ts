@@ -134,3 +134,19 @@ describe('the ledger', () => {
     await shop.as('owner').get('/api/stock-movements/file?kind=take').expect(200);
   });
 });
+
+it('what was written down a day late was awaited until then, and is neither lost nor there twice', async () => {
+  at('2026-11-30');
+  const order = await orderMore(shop, things);
+  at('2026-12-01');
+  const hardware = [
+    { hardwareId: things.hardwareId, purchaseLineId: order.rivetLine, quantity: 600 },
+  ];
+  const came = { purchaseOrderId: order.id, receivedOn: '2026-11-30', hardware };
+  await shop.as('owner').post('/api/receipts').send(came).expect(201);
+  const rivets = async (on: string) => (await levels({ on })).hardware[0];
+  const awaited = { quantity: 700, standing: { onOrder: '2000' } };
+  expect(await rivets('2026-11-30')).toMatchObject(awaited);
+  const partly = { quantity: 1300, standing: { onOrder: '1400' } };
+  expect(await rivets('2026-12-01')).toMatchObject(partly);
+});

@@ -22,7 +22,7 @@ const withValue = (shown: boolean, column: Column) => (shown ? [column] : []);
 const valueCell = (shown: boolean, value: string | undefined): Cell[] =>
   shown ? [value ?? null] : [];
 
-const standingWords = ['Held for jobs', 'Free', 'On order', 'Promised of it'];
+const standingWords = ['Held for jobs', 'Free', 'On order', 'Promised of both'];
 const standingOf = ({ reserved, free, onOrder, promised }: HardwareLevel['standing']) => [
   reserved,
   free,

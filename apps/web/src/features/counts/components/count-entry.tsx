@@ -98,7 +98,7 @@ export function CountEntry({ line, waits, onRead, onDone, onNext }: CountEntryPr
             aria-pressed={line.unmeasured}
             onClick={() => take(line.unmeasured ? {} : { unmeasured: true })}
           >
-            Hangs uncut
+            Hangs there
           </Button>
         )}
       </div>

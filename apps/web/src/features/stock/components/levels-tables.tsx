@@ -23,7 +23,7 @@ const standingWords = {
   reserved: 'Held for jobs',
   free: 'Free',
   onOrder: 'On order',
-  promised: 'Promised of it',
+  promised: 'Promised of both',
 } as const;
 
 function columnsFor(

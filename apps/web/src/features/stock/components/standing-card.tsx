@@ -4,26 +4,27 @@ import { KeyFigures } from '../../../components/key-figures.tsx';
 import { countText } from '../../../lib/formatting.ts';
 import { levelsQuery } from '../stock.queries.ts';
 
-/** How one hardware stands: on the shelf, held, free, and what of the next delivery is promised already. */
+/** How one hardware stands: what is free now and on order, what of both open jobs still need, and what that leaves. */
 export function StandingCard({ hardwareId }: { hardwareId: number }) {
   const { data } = useQuery(levelsQuery({ hardwareId }));
   const [level] = data?.hardware ?? [];
   if (level === undefined) return null;
-  const { onOrder, promised } = level.standing;
-  const still = Number(onOrder) - Number(promised);
+  const { free, onOrder, promised } = level.standing;
+  const left = Number(free) + Number(onOrder) - Number(promised);
   return (
-    <Card title="Still to come">
+    <Card title="Free and on order">
       <KeyFigures
         figures={[
+          { word: 'Free now', figure: countText(Number(free)) },
           { word: 'On order', figure: countText(Number(onOrder)) },
           {
-            word: 'Promised of it',
+            word: 'Promised of both',
             figure: countText(Number(promised)),
-            note: 'what open jobs need and the shelf does not hold',
+            note: 'what open jobs need and is not held for them',
           },
-          still < 0
-            ? { word: 'Missing', figure: countText(-still), note: 'order as many more' }
-            : { word: 'Left of it', figure: countText(still) },
+          left < 0
+            ? { word: 'Missing', figure: countText(-left), note: 'order as many more' }
+            : { word: 'Left', figure: countText(left) },
         ]}
       />
     </Card>
