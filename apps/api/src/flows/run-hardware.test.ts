@@ -191,6 +191,43 @@ describe('hardware that is set before the last pieces fail', () => {
     expect(await reservedOf(ring)).toBe(2 * cutCount);
   });
 
+  it('has its allowance where an option adds it and says its step, or puts it in another’s place', async () => {
+    const charm = await add({ name: 'Charm', unitPrice: '0.30' });
+    const hook = await add({ name: 'Hook', unitPrice: '0.40' });
+    const hardware = [charm, hook].map((id) => ({ hardwareId: id, quantity: 130 }));
+    await owner().post('/api/receipts').send({ hardware }).expect(201);
+    const withCharm = (fromStep: number | null) =>
+      changePattern(() => ({
+        hardware: [{ hardwareId: cap, perPiece: 1, fromStep: 0 }],
+        options: [
+          {
+            name: 'Charmed',
+            swaps: [
+              { hardwareId: null, byHardwareId: charm, perPiece: 1, fromStep },
+              { hardwareId: cap, byHardwareId: hook, perPiece: 1 },
+            ],
+          },
+        ],
+      }));
+    const asked = { patternId: ready.patternId, quantity: 50, by: '2026-12-18', option: 'Charmed' };
+    const needed = ({ answers }: RunsCheck['runs'][number], of: string) =>
+      Number(answers.find(({ name }) => name === of)?.needed);
+    await withCharm(null);
+    const unsaid = await said([asked]);
+    const { cutCount } = unsaid;
+    expect([needed(unsaid, 'Charm'), needed(unsaid, 'Hook')]).toEqual([50, cutCount]);
+    expect(unsaid.remarks.join()).toContain('no spares of Charm are counted');
+    await withCharm(0);
+    const mended = await said([asked]);
+    expect([needed(mended, 'Charm'), needed(mended, 'Hook')]).toEqual([cutCount, cutCount]);
+    expect(mended.remarks).toEqual([]);
+    const terms = { options: [{ name: 'Charmed', typedExtra: null }] };
+    const quoted = await agreedQuote(ready, 50, { terms });
+    const fromQuote = await said([{ quoteId: quoted.id, option: 'Charmed', quantity: 50 }]);
+    expect(needed(fromQuote, 'Charm')).toBe(cutCount);
+    await changePattern(() => ({ options: [] }));
+  });
+
   it('has its allowance in every part of a kit, and no remark where nothing fails', async () => {
     await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1, fromStep: 0 }] }));
     const asked = { patternId: ready.patternId, quantity: 20, by: '2026-12-18' };

@@ -95,10 +95,11 @@ export function linesWith(
   const swaps = options.find((option) => option.name === name)?.swaps ?? [];
   const out = new Set(swaps.map(({ hardwareId }) => hardwareId));
   const stays = hardware.filter(({ hardwareId }) => !out.has(hardwareId));
-  const comes = swaps.flatMap(({ hardwareId, byHardwareId, perPiece }) => {
+  const comes = swaps.flatMap(({ hardwareId, byHardwareId, perPiece, fromStep }) => {
     if (byHardwareId === null) return [];
-    const before = hardware.find((line) => line.hardwareId === hardwareId);
-    return [{ ...before, hardwareId: byHardwareId, perPiece }];
+    // What takes a line's place is counted as that was; what is added says its step itself.
+    const as = hardware.find((line) => line.hardwareId === hardwareId) ?? { fromStep };
+    return [{ ...as, hardwareId: byHardwareId, perPiece }];
   });
   return [...stays, ...comes];
 }
