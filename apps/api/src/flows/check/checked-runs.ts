@@ -40,11 +40,11 @@ export async function checkPlanned(
   const rows = await freeLotRows(em, leatherIds);
   const { stock, owed } = await loadShopStock(work, { leatherIds, hardwareIds }, rows);
   const tools = await inTurn(planned, (run) => toolsOf(em, run));
-  const set = await readSetLines(em, planned);
+  const setLines = await readSetLines(em, planned);
   const needs = await inTurn(planned, (run, at) =>
     needsOf(em, run, {
       rows,
-      tools: [...(tools[at]?.needs ?? []), ...diesNeeded(set[at] ?? [])],
+      tools: [...(tools[at]?.needs ?? []), ...diesNeeded(setLines[at] ?? [])],
     }),
   );
   const shop = { ...stock, tools: once(tools.flatMap((each) => each.tools)).map(toToolStock) };
@@ -56,7 +56,7 @@ export async function checkPlanned(
       planned: run,
       facts: found,
       press: await pressForCheck(em, run, tools[at]?.tools ?? []),
-      misfits: misfitsThrough(set[at] ?? [], weightsCut(found.leather)),
+      misfits: misfitsThrough(setLines[at] ?? [], weightsCut(found.leather)),
       finished: finishedWords(there, run),
     };
   });

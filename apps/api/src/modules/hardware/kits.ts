@@ -2,7 +2,7 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { KitPart } from './kit-part.entity.ts';
 
 /** The parts of each kit among these, by the kit's number; what is no kit is not in it. */
-export async function kitsAmong(
+async function kitsAmong(
   em: EntityManager,
   ids: readonly number[],
 ): Promise<Map<number, KitPart[]>> {

@@ -5,7 +5,7 @@ import type { Hardware } from './hardware.entity.ts';
 import { kindsWithParts, partsAmong, type WithParts } from './kits.ts';
 
 /** Which kind it is, and how it is set. */
-export type NamedSetting = Setting & Pick<Hardware, 'id' | 'name' | 'unit'>;
+type NamedSetting = Setting & Pick<Hardware, 'id' | 'name' | 'unit'>;
 
 /** With the parts of a kit. */
 export interface KitSetting extends NamedSetting {
