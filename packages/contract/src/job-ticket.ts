@@ -65,6 +65,8 @@ const jobLot = z
     takenAreaMm2: z.string(),
     /** What would mix with the leather that the order has already; null where nothing does. */
     mix: z.object({ of: z.enum(['shades', 'lots']), sentence: z.string() }).nullable(),
+    /** What of the job's hardware does not fit the lot's own weight, in sentences; it stops nothing. */
+    misfits: z.array(z.string()),
   })
   .meta({ id: 'JobLot' });
 export type JobLot = z.infer<typeof jobLot>;

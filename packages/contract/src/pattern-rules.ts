@@ -1,7 +1,12 @@
 import type { z } from 'zod';
 
+interface Waits {
+  fromStep?: number | null | undefined;
+}
+
 interface Steps {
-  hardware: readonly { fromStep?: number | null | undefined }[];
+  hardware: readonly Waits[];
+  options?: readonly { swaps: readonly Waits[] }[] | undefined;
   work:
     | { kind: 'minutesPer100' }
     | {
@@ -14,13 +19,19 @@ interface Steps {
 }
 
 /** Hardware waits for a step that is there, and no step's longest wait is over before its shortest. */
-export function refineSteps({ hardware, work }: Steps, context: z.RefinementCtx): void {
+export function refineSteps(
+  { hardware, options = [], work }: Steps,
+  context: z.RefinementCtx,
+): void {
   const steps = work.kind === 'steps' ? work.steps : [{}];
-  hardware.forEach(({ fromStep }, at) => {
-    if (typeof fromStep !== 'number' || fromStep < steps.length) return;
-    const message = 'There is no such step. Choose one of the steps.';
-    context.addIssue({ code: 'custom', path: ['hardware', at, 'fromStep'], message });
-  });
+  const sayOfMissing = (lines: readonly Waits[], path: (string | number)[]) =>
+    lines.forEach(({ fromStep }, at) => {
+      if (typeof fromStep !== 'number' || fromStep < steps.length) return;
+      const message = 'There is no such step. Choose one of the steps.';
+      context.addIssue({ code: 'custom', path: [...path, at, 'fromStep'], message });
+    });
+  sayOfMissing(hardware, ['hardware']);
+  options.forEach(({ swaps }, at) => sayOfMissing(swaps, ['options', at, 'swaps']));
   steps.forEach(({ shortestWait, longestWait }, at) => {
     if (!shortestWait || !longestWait || Number(longestWait) >= Number(shortestWait)) return;
     const message = 'The longest wait is shorter than the shortest: write a longer one.';
@@ -33,7 +44,7 @@ interface Options {
   options?:
     | readonly {
         name: string;
-        swaps: readonly { hardwareId: number | null; byHardwareId: number | null }[];
+        swaps: readonly (Waits & { hardwareId: number | null; byHardwareId: number | null })[];
       }[]
     | undefined;
 }
@@ -46,12 +57,17 @@ export function refineOptions({ hardware, options = [] }: Options, context: z.Re
       context.addIssue({ code: 'custom', path: ['options', at, ...path], message });
     if (options.findIndex((each) => each.name === name) !== at)
       say(['name'], 'Another option has this name. Give it one of its own.');
-    swaps.forEach(({ hardwareId, byHardwareId }, swap) => {
+    swaps.forEach(({ hardwareId, byHardwareId, fromStep }, swap) => {
       const path = ['swaps', swap, 'hardwareId'];
       if (hardwareId === null && byHardwareId === null)
         say(path, 'Say what is left out, or what comes.');
       if (hardwareId !== null && !taken.has(hardwareId))
         say(path, 'The pattern does not take this hardware. Choose some that it takes.');
+      if (hardwareId !== null && typeof fromStep === 'number')
+        say(
+          ['swaps', swap, 'fromStep'],
+          'It goes by the line that it replaces: say the step there.',
+        );
     });
   });
 }

@@ -21,6 +21,8 @@ import { workPlan } from './work-plan.ts';
 
 const perPiece = positiveCount.max(10_000, 'Enter at most 10,000.');
 const per = z.enum(hardwarePers, 'Choose what it is counted per.');
+/** Needed for every piece that reaches this step, counted from 0; else for the pieces ordered. */
+const fromStep = z.int('Choose a step.').min(0).max(39).nullish();
 
 const hardwareLine = z.strictObject({
   hardwareId: id,
@@ -28,8 +30,7 @@ const hardwareLine = z.strictObject({
   perPiece,
   /** For each piece, where nobody said. */
   per: per.optional(),
-  /** Needed for every piece that reaches this step, counted from 0; else for the pieces ordered. */
-  fromStep: z.int('Choose a step.').min(0).max(39).nullish(),
+  fromStep,
   /** Layers of leather that it is set through; two where nobody said. */
   layers: z
     .int('Enter whole layers.')
@@ -60,6 +61,8 @@ const patternOption = z.strictObject({
         /** What comes in its place; nothing where it is only left out. */
         byHardwareId: id.nullable(),
         perPiece,
+        /** Of what is added; what comes in a line's place is needed from the same step on. */
+        fromStep,
       }),
     )
     .min(1, 'Say what is different.')

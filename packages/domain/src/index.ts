@@ -55,6 +55,7 @@ export { handCount } from './yield/hand-count.ts';
 export { layoutInputKey } from './yield/layout-input-key.ts';
 
 export * from './leather/drawn-side.ts';
+export * from './leather/leather-weight.ts';
 
 export * from './press/press-load.ts';
 
@@ -106,6 +107,7 @@ export * from './stock/check-runs.ts';
 export type * from './stock/check-stock.ts';
 export type { ItemFacts, Standing } from './stock/check-items.ts';
 export type { LeatherFacts, LotTaken } from './stock/check-leather.ts';
+export { weightsCut } from './stock/weights-cut.ts';
 export type { ToolFacts } from './stock/check-tools.ts';
 export * from './stock/check-words.ts';
 export * from './stock/coming-weeks.ts';

@@ -109,6 +109,44 @@ describe('a kit on a pattern', () => {
   });
 });
 
+describe('lots that have a weight of their own', () => {
+  const heavy =
+    'Rivet in two: Post 8 mm: The post is 8 mm and holds 5 to 6.5 mm. Three layers of lot OT-140, at 8 oz, are 9.5 mm: 3 mm too thick. Take a longer one, or fewer layers. Or cut from another lot.';
+  let lotId: number;
+  const weigh = (weightOz: string | null) => change(`lots/${lotId}`, { weightOz });
+  const misfits = async () => {
+    const run = { patternId: ready.patternId, quantity: 50, by: '2026-12-18' };
+    const { lots, remarks } = await said([run]);
+    expect(lots.map(({ tag }) => tag)).toEqual(['OT-140']);
+    return remarks.filter((remark) => remark.startsWith('Rivet in two'));
+  };
+
+  it('are what the check holds the hardware against, in place of the leather’s range', async () => {
+    await change(`leathers/${ready.leatherId}`, { weightLowOz: '5', weightHighOz: '6' });
+    await changePattern(() => ({ hardware: [{ hardwareId: kit, perPiece: 1, layers: 3 }] }));
+    const side = { leatherId: ready.leatherId, form: 'side', measuredAreaMm2: '4000000' };
+    const lots = [{ ...side, tag: 'OT-140', cost: '400.00' }];
+    const { body } = await owner().post('/api/receipts').send({ lots }).expect(201);
+    lotId = body.lots[0].id;
+    expect((await misfits())[0]).toContain('Three layers of 5 to 6 oz');
+    await weigh('8');
+    expect(await misfits()).toEqual([heavy]);
+    await weigh('5');
+    expect(await misfits()).toEqual([]);
+  });
+
+  it('are warned of on the ticket where the hardware does not fit them, and stop nothing', async () => {
+    await weigh('8');
+    const ticket = await ticketOf(ready, await takenOn(ready, 50, { evenIfShort: true }));
+    expect(ticket.lots.map(({ tag, misfits: said }) => [tag, said])).toEqual([
+      ['OT-140', [heavy]],
+      ['OT-118', []],
+    ]);
+    const taking = { lotId, areaMm2: '1000' };
+    await owner().post(`/api/jobs/${ticket.id}/takings`).send(taking).expect(201);
+  });
+});
+
 describe('hardware that is set before the last pieces fail', () => {
   const sentenceOf = ({ answers }: RunsCheck['runs'][number], of: string) =>
     answers.find(({ name }) => name === of)?.sentence;
@@ -151,6 +189,43 @@ describe('hardware that is set before the last pieces fail', () => {
       held: 2 * cutCount,
     });
     expect(await reservedOf(ring)).toBe(2 * cutCount);
+  });
+
+  it('has its allowance where an option adds it and says its step, or puts it in another’s place', async () => {
+    const charm = await add({ name: 'Charm', unitPrice: '0.30' });
+    const hook = await add({ name: 'Hook', unitPrice: '0.40' });
+    const hardware = [charm, hook].map((id) => ({ hardwareId: id, quantity: 130 }));
+    await owner().post('/api/receipts').send({ hardware }).expect(201);
+    const withCharm = (fromStep: number | null) =>
+      changePattern(() => ({
+        hardware: [{ hardwareId: cap, perPiece: 1, fromStep: 0 }],
+        options: [
+          {
+            name: 'Charmed',
+            swaps: [
+              { hardwareId: null, byHardwareId: charm, perPiece: 1, fromStep },
+              { hardwareId: cap, byHardwareId: hook, perPiece: 1 },
+            ],
+          },
+        ],
+      }));
+    const asked = { patternId: ready.patternId, quantity: 50, by: '2026-12-18', option: 'Charmed' };
+    const needed = ({ answers }: RunsCheck['runs'][number], of: string) =>
+      Number(answers.find(({ name }) => name === of)?.needed);
+    await withCharm(null);
+    const unsaid = await said([asked]);
+    const { cutCount } = unsaid;
+    expect([needed(unsaid, 'Charm'), needed(unsaid, 'Hook')]).toEqual([50, cutCount]);
+    expect(unsaid.remarks.join()).toContain('no spares of Charm are counted');
+    await withCharm(0);
+    const mended = await said([asked]);
+    expect([needed(mended, 'Charm'), needed(mended, 'Hook')]).toEqual([cutCount, cutCount]);
+    expect(mended.remarks).toEqual([]);
+    const terms = { options: [{ name: 'Charmed', typedExtra: null }] };
+    const quoted = await agreedQuote(ready, 50, { terms });
+    const fromQuote = await said([{ quoteId: quoted.id, option: 'Charmed', quantity: 50 }]);
+    expect(needed(fromQuote, 'Charm')).toBe(cutCount);
+    await changePattern(() => ({ options: [] }));
   });
 
   it('has its allowance in every part of a kit, and no remark where nothing fails', async () => {

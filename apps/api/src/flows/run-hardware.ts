@@ -2,6 +2,7 @@ import type { PatternDefinition } from '@hidewright/contract';
 import { pricesInKit, type RunHardware } from '@hidewright/domain';
 import { priceText } from '../http/decimal-text.ts';
 import { unscaled } from '../db/columns/scaled-decimal.ts';
+import { kindsWithParts, partsAmong, type WithParts } from '../modules/hardware/kits.ts';
 import type { Work } from '../work.ts';
 
 /** A kind of hardware as a run counts it: of a kit its parts, each at its price in that kit. */
@@ -24,7 +25,7 @@ export async function hardwareKinds(
       swaps.flatMap(({ byHardwareId }) => (byHardwareId === null ? [] : [byHardwareId])),
     ),
   ]);
-  const rows = await pricedRows(em, ids);
+  const rows = await kindsWithParts<PricedRow>(em, ids, ['name', 'unit_price', 'price_from_parts']);
   const plain = (row: PricedRow) => ({
     name: row.name,
     unitPrice: priceText(unscaled(row.unit_price, 4)),
@@ -32,36 +33,20 @@ export async function hardwareKinds(
   const byId = new Map(rows.map((row) => [row.id, row]));
   return new Map(
     rows.map((row) => {
-      const parts = (JSON.parse(row.parts) as [number, number][]).flatMap(([id, quantity]) => {
-        const part = byId.get(id);
-        return part === undefined ? [] : [{ ...plain(part), hardwareId: id, quantity }];
-      });
+      const parts = partsAmong(row, byId).map(({ part, quantity }) => ({
+        ...plain(part),
+        hardwareId: part.id,
+        quantity,
+      }));
       return [row.id, { ...plain(row), parts: pricedIn(row, plain(row).unitPrice, parts) }];
     }),
   );
 }
 
-interface PricedRow {
-  id: number;
+interface PricedRow extends WithParts {
   name: string;
   unit_price: number;
   price_from_parts: number;
-  /** [hardware, how many] of a kit, as JSON */
-  parts: string;
-}
-
-/** These kinds of hardware and, of each kit among them, its parts: in plain SQL, since every price asks for them. */
-function pricedRows(em: Work['em'], ids: readonly number[]): Promise<PricedRow[]> {
-  return em.execute<PricedRow[]>(
-    `WITH named (id) AS (SELECT DISTINCT value FROM json_each(?))
-    SELECT h.id, h.name, h.unit_price, h.price_from_parts,
-      (SELECT json_group_array(json_array(k.hardware_id, k.quantity) ORDER BY k.id) FROM kit_part k
-        WHERE k.kit_id = h.id AND h.id IN (SELECT id FROM named)) AS parts
-    FROM hardware h
-    WHERE h.id IN (SELECT id FROM named
-      UNION SELECT hardware_id FROM kit_part WHERE kit_id IN (SELECT id FROM named))`,
-    [JSON.stringify(ids)],
-  );
 }
 
 function pricedIn(
@@ -110,10 +95,11 @@ export function linesWith(
   const swaps = options.find((option) => option.name === name)?.swaps ?? [];
   const out = new Set(swaps.map(({ hardwareId }) => hardwareId));
   const stays = hardware.filter(({ hardwareId }) => !out.has(hardwareId));
-  const comes = swaps.flatMap(({ hardwareId, byHardwareId, perPiece }) => {
+  const comes = swaps.flatMap(({ hardwareId, byHardwareId, perPiece, fromStep }) => {
     if (byHardwareId === null) return [];
-    const before = hardware.find((line) => line.hardwareId === hardwareId);
-    return [{ ...before, hardwareId: byHardwareId, perPiece }];
+    // What takes a line's place is counted as that was; what is added says its step itself.
+    const as = hardware.find((line) => line.hardwareId === hardwareId) ?? { fromStep };
+    return [{ ...as, hardwareId: byHardwareId, perPiece }];
   });
   return [...stays, ...comes];
 }

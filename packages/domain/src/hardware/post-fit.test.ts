@@ -36,6 +36,19 @@ describe('a post against the folded stack', () => {
     ]);
   });
 
+  it('is held against lots by their own weight, which are named', () => {
+    // 2 × 3 oz = 6/64 in = 2.38125 mm, 3 × 8 oz = 24/64 in = 9.525 mm
+    const split = { weightLowOz: '3', weightHighOz: '3', lots: ['OT-201'] };
+    expect(settingFaults(rivet, { ...split, layers: 2 })).toEqual([
+      'The post is 8 mm and holds 5 to 6.5 mm. Two layers of lot OT-201, at 3 oz, are 2.4 mm: 2.6 mm too thin. Take a shorter one, or add a layer. Or cut from another lot.',
+    ]);
+    const heavy = { weightLowOz: '8', weightHighOz: '8', lots: ['OT-201', 'OT-202', 'OT-204'] };
+    expect(settingFaults(rivet, { ...heavy, layers: 3 })).toEqual([
+      'The post is 8 mm and holds 5 to 6.5 mm. Three layers of lots OT-201, OT-202 and OT-204, at 8 oz, are 9.5 mm: 3 mm too thick. Take a longer one, or fewer layers. Or cut from another lot.',
+    ]);
+    expect(settingFaults(rivet, { ...split, layers: 5 })).toEqual([]);
+  });
+
   it('fits, or nothing certain is known', () => {
     const one = { ...twoOf5to6, layers: 3, weightHighOz: '5' };
     expect(settingFaults(rivet, one)).toEqual([]);

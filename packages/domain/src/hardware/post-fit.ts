@@ -1,4 +1,5 @@
 import type { Decimal } from 'decimal.js';
+import type { LeatherWeight } from '../leather/leather-weight.ts';
 import {
   type DecimalText,
   Exact,
@@ -6,6 +7,7 @@ import {
   readWhole,
   toAtMost,
 } from '../numbers/decimal-text.ts';
+import { tagWords } from '../stock/tag-words.ts';
 import { convert } from '../units/convert.ts';
 
 /** Hardware that is set through leather, as far as it is known. Lengths in mm, 0 or more. */
@@ -20,12 +22,9 @@ export interface Setting {
 }
 
 /** What it is set through. */
-export interface Stack {
+export interface Stack extends LeatherWeight {
   /** layers of leather on top of each other, 1 to 20; null where nobody said: one on another, two */
   layers: number | null;
-  /** weight of the leather, null where nobody said */
-  weightLowOz: DecimalText | null;
-  weightHighOz: DecimalText | null;
 }
 
 const usualLayers = 2;
@@ -72,7 +71,7 @@ export const lacksDie = ({ settingDie, settingDieHere }: Setting): boolean =>
   settingDie !== '' && !settingDieHere;
 
 function stackFaults(setting: Setting, stack: Stack): string[] {
-  const { weightLowOz, weightHighOz } = stack;
+  const { weightLowOz, weightHighOz, lots = [] } = stack;
   const layers = stack.layers ?? usualLayers;
   readWhole(layers, 'layers', 1, 20);
   if (weightLowOz === null) return [];
@@ -84,8 +83,16 @@ function stackFaults(setting: Setting, stack: Stack): string[] {
   if (verdict === null) return [];
   const weight = rangeText(new Exact(weightLowOz), new Exact(weightHighOz ?? weightLowOz), 3);
   const are = layers === 1 ? 'is' : 'are';
-  const stacked = `${numbers[layers] ?? `${layers} layers`} of ${weight} oz ${are} ${rangeText(low, high, 1)} mm`;
-  return [`${holds(setting)}${stacked}: ${verdict}`];
+  const leather = leatherWords(`${weight} oz`, lots);
+  const stacked = `${numbers[layers] ?? `${layers} layers`} of ${leather} ${are} ${rangeText(low, high, 1)} mm`;
+  const other = lots.length === 0 ? '' : ' Or cut from another lot.';
+  return [`${holds(setting)}${stacked}: ${verdict}${other}`];
+}
+
+/** 5 to 6 oz; or lots OT-118 and OT-119, at 3 oz, */
+function leatherWords(weight: string, lots: readonly string[]): string {
+  if (lots.length === 0) return weight;
+  return `${lots.length === 1 ? 'lot' : 'lots'} ${tagWords(lots)}, at ${weight},`;
 }
 
 /** What the hardware is made for, before what it is to be set through. */
@@ -106,15 +113,16 @@ function verdictOn(
 ): string | null {
   // Without a stack that it is known to hold, only a post that does not even come through is certainly wrong.
   const most = stackMaxMm ?? postLengthMm;
+  const upTo = low.eq(high) ? '' : 'up to ';
   if (most !== null && high.gt(most)) {
     const by = toAtMost(high.minus(most), 1);
     return stackMaxMm === null
       ? 'it does not come through. Take a longer one.'
-      : `up to ${by} mm too thick. Take a longer one, or fewer layers.`;
+      : `${upTo}${by} mm too thick. Take a longer one, or fewer layers.`;
   }
   if (stackMinMm !== null && low.lt(stackMinMm)) {
     const by = toAtMost(new Exact(stackMinMm).minus(low), 1);
-    return `up to ${by} mm too thin. Take a shorter one, or add a layer.`;
+    return `${upTo}${by} mm too thin. Take a shorter one, or add a layer.`;
   }
   return null;
 }

@@ -92,21 +92,27 @@ const noneFits = ({ lot, from }: Offered): boolean =>
  * will be cut from: they are given the lots of which this run has the least.
  */
 function notOwed({ owed }: LeatherStock, { cut, laid }: LeatherNeed, offered: Offered[]): number {
+  const all = offered.reduce((sum, { from }) => sum + from.pieces, 0);
+  if (owed === 0) return all;
   let left = owed;
   const panel = panelArea(cut);
-  return [...offered]
-    .sort((a, b) => yieldOf(a) - yieldOf(b))
-    .reduce((sum, { lot, from }) => {
-      const gone = Math.min(left, usableArea(lot));
-      left -= gone;
-      if (gone === 0) return sum + from.pieces;
-      const less = { ...lot, freeArea: lot.freeArea - gone };
-      return sum + piecesFromLot(less, cut, laid.get(lot.lotId) ?? null, panel).pieces;
-    }, 0);
+  return leastYieldFirst(offered).reduce((pieces, { lot, from, usable }) => {
+    const gone = Math.min(left, usable);
+    left -= gone;
+    if (gone === 0) return pieces;
+    const less = { ...lot, freeArea: lot.freeArea - gone };
+    const still = piecesFromLot(less, cut, laid.get(lot.lotId) ?? null, panel).pieces;
+    return pieces - from.pieces + still;
+  }, all);
 }
 
-/** Pieces for each part of it that can be cut; what cannot be cut at all is given first. */
-const yieldOf = ({ lot, from }: Offered): number => from.pieces / Math.max(1, usableArea(lot));
+/** By the pieces for each part of it that can be cut; what cannot be cut at all is given first. */
+const leastYieldFirst = (offered: readonly Offered[]): (Offered & { usable: number })[] =>
+  offered
+    .map((each) => ({ ...each, usable: usableArea(each.lot) }))
+    .map((each) => ({ each, yields: each.from.pieces / Math.max(1, each.usable) }))
+    .sort((a, b) => a.yields - b.yields)
+    .map(({ each }) => each);
 
 function takeFrom({ lot, from }: Offered, pieces: number): LotTaken {
   const units = Math.ceil(pieces / from.perUnit);

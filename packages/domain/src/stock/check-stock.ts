@@ -1,4 +1,5 @@
 import type { HardwareUnit } from '../hardware/units.ts';
+import type { LeatherWeight } from '../leather/leather-weight.ts';
 import type { DecimalText } from '../numbers/decimal-text.ts';
 import type { Bench, WorkPart } from '../promise/bench-time.ts';
 import type { Day } from '../promise/day.ts';
@@ -52,12 +53,16 @@ export interface RackLot extends LotToCut {
   place: string;
   shade: string;
   receivedOn: Day;
+  /** its own; where there is none it goes by its leather's */
+  weightOz?: DecimalText | null;
 }
 
 /** A leather: its lots, and what of it is yet to come in thousandths of mm² that can be cut. */
 export interface LeatherStock {
   leatherId: number;
   name: string;
+  /** as it is sold */
+  weight?: LeatherWeight;
   lots: readonly RackLot[];
   /** what jobs taken on still need and do not hold, in thousandths of mm² */
   owed: number;

@@ -1,3 +1,5 @@
+import { tagWords } from './tag-words.ts';
+
 /** A lot that an order is cut from, or may be. */
 export interface LotOfOrder {
   lotId: number;
@@ -28,21 +30,15 @@ export function mixedWith(lot: LotOfOrder, others: readonly LotOfOrder[]): LotMi
 }
 
 function ofShades(lot: LotOfOrder, unlike: readonly LotOfOrder[]): string {
-  const others = list(unlike.map(({ tag, shade }) => `${tag} (${shade})`));
+  const others = tagWords(unlike.map(({ tag, shade }) => `${tag} (${shade})`));
   return `Shades would mix: ${lot.tag} is ${lot.shade}, and this order has ${others}. Lay them side by side before you cut.`;
 }
 
 function ofLots(lot: LotOfOrder, foreign: readonly LotOfOrder[]): string {
-  const others = list(foreign.map(({ tag }) => tag));
+  const others = tagWords(foreign.map(({ tag }) => tag));
   const alike = lot.shade !== '' && foreign.every(({ shade }) => shade === lot.shade);
   const known = alike
     ? `${foreign.length > 1 ? 'All' : 'Both'} are noted as ${lot.shade}; still lay`
     : 'Their shades are not all noted: lay';
   return `${lot.tag} is another side than ${others}, which this order has. ${known} them side by side before you cut.`;
-}
-
-function list(words: readonly string[]): string {
-  return words.length < 2
-    ? words.join('')
-    : `${words.slice(0, -1).join(', ')} and ${words.at(-1) ?? ''}`;
 }

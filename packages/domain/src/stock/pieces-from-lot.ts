@@ -136,6 +136,8 @@ export const usableOf = (lots: readonly LotToCut[]): number =>
 
 /** `area × part / whole` of whole numbers of 0 or more, rounded; the product may be beyond exact numbers. */
 function divided(area: number, part: number, whole: number, rounded: 'up' | 'down'): number {
+  const product = area * part + (rounded === 'up' ? whole - 1 : 0);
+  if (Number.isSafeInteger(product)) return (product - (product % whole)) / whole;
   const beyond = rounded === 'up' ? BigInt(whole) - 1n : 0n;
   return Number((BigInt(area) * BigInt(part) + beyond) / BigInt(whole));
 }

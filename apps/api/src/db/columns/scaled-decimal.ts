@@ -52,3 +52,7 @@ export function scaled(value: Decimal, places: number): number {
 export function unscaled(whole: number, places: number): Decimal {
   return new Decimal(whole).times(parts[places] as Decimal);
 }
+
+/** The same as text; null where the column is. */
+export const unscaledText = (whole: number | null, places: number): string | null =>
+  whole === null ? null : unscaled(whole, places).toString();

@@ -9,6 +9,8 @@ export interface BoughtLeather extends BoughtRow {
   name: string;
   whole_form: Leather['wholeForm'];
   usable_percent: number;
+  weight_low_oz: number | null;
+  weight_high_oz: number | null;
 }
 
 /** In plain SQL, since every check asks for it. */
@@ -18,7 +20,8 @@ export function boughtLeathers(
 ): Promise<BoughtLeather[]> {
   return em.execute<BoughtLeather[]>(
     `SELECT 'leather' AS "of", id, name, price_per_ft2 AS price, 1 AS pack_size, supplier_id, whole_form,
-      CASE WHEN whole_form IS NOT NULL THEN whole_area_mm2 END AS whole_area, whole_usable_percent AS usable_percent
+      CASE WHEN whole_form IS NOT NULL THEN whole_area_mm2 END AS whole_area, whole_usable_percent AS usable_percent,
+      weight_low_oz, weight_high_oz
     FROM leather WHERE id IN (SELECT value FROM json_each(?)) ORDER BY id`,
     [JSON.stringify(ids)],
   );

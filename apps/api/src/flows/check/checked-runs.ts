@@ -1,6 +1,7 @@
 import type { CheckAnswer } from '@hidewright/contract';
-import { checkRuns, type RunFacts, type ShopStock } from '@hidewright/domain';
+import { checkRuns, weightsCut, type RunFacts, type ShopStock } from '@hidewright/domain';
 import type { Work } from '../../work.ts';
+import { misfitsThrough, readSetLines } from '../set-hardware.ts';
 import type { Tool } from '../../modules/tools/tool.entity.ts';
 import { finishedOf, finishedWords } from './finished-for-check.ts';
 import { freeLotRows } from './leather-for-check.ts';
@@ -8,14 +9,14 @@ import { loadShopStock } from './load-shop-stock.ts';
 import { needsOf, toolsOf, toToolStock } from './needs-of-runs.ts';
 import type { OwedToJobs } from './owed-to-jobs.ts';
 import { pressForCheck } from './press-for-check.ts';
-import { settingOf } from './setting-for-check.ts';
+import { diesNeeded } from './setting-dies.ts';
 import type { PlannedRun } from './runs-asked.ts';
 
 export interface CheckedRun {
   planned: PlannedRun;
   facts: RunFacts;
   press: CheckAnswer | null;
-  /** What of its hardware does not fit the folded leather, in sentences. */
+  /** What of its hardware does not fit the leather that it is cut from, folded; in sentences. */
   misfits: string[];
   /** What lies finished already, in words. */
   finished: string[];
@@ -39,23 +40,26 @@ export async function checkPlanned(
   const rows = await freeLotRows(em, leatherIds);
   const { stock, owed } = await loadShopStock(work, { leatherIds, hardwareIds }, rows);
   const tools = await inTurn(planned, (run) => toolsOf(em, run));
-  const settings = await settingOf(em, planned);
+  const setLines = await readSetLines(em, planned);
   const needs = await inTurn(planned, (run, at) =>
     needsOf(em, run, {
       rows,
-      tools: [...(tools[at]?.needs ?? []), ...(settings[at]?.dies ?? [])],
+      tools: [...(tools[at]?.needs ?? []), ...diesNeeded(setLines[at] ?? [])],
     }),
   );
   const shop = { ...stock, tools: once(tools.flatMap((each) => each.tools)).map(toToolStock) };
   const facts = checkRuns(shop, needs);
   const there = await finishedOf(em, planned);
-  const runs = await inTurn(planned, async (run, at) => ({
-    planned: run,
-    facts: facts[at] as RunFacts,
-    press: await pressForCheck(em, run, tools[at]?.tools ?? []),
-    misfits: settings[at]?.misfits ?? [],
-    finished: finishedWords(there, run),
-  }));
+  const runs = await inTurn(planned, async (run, at) => {
+    const found = facts[at] as RunFacts;
+    return {
+      planned: run,
+      facts: found,
+      press: await pressForCheck(em, run, tools[at]?.tools ?? []),
+      misfits: misfitsThrough(setLines[at] ?? [], weightsCut(found.leather)),
+      finished: finishedWords(there, run),
+    };
+  });
   return { shop, owed, runs };
 }
 

@@ -1,6 +1,6 @@
 import { soundAreaMm2, type DrawnSide, type LeatherStock } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
-import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { unscaled, unscaledText } from '../../db/columns/scaled-decimal.ts';
 import { Lot } from '../../modules/lots/lot.entity.ts';
 import { StockBalance } from '../../modules/stock/stock-balance.entity.ts';
 
@@ -40,6 +40,7 @@ export interface LotRow {
   height_mm: number | null;
   outline: string | null;
   flaws: string;
+  weight_oz: number | null;
   free: number;
 }
 
@@ -47,7 +48,8 @@ export interface LotRow {
 export function freeLotRows(em: EntityManager, leatherIds: readonly number[]): Promise<LotRow[]> {
   return em.execute<LotRow[]>(
     `SELECT l.id, l.tag, l.leather_id, l.place, l.shade, l.received_on, l.form, l.pieces, l.measured_area_mm2,
-      l.usable_percent, l.width_mm, l.height_mm, l.outline, l.flaws, b.on_hand - b.reserved AS free
+      l.usable_percent, l.width_mm, l.height_mm, l.outline, l.flaws, l.weight_oz,
+      b.on_hand - b.reserved AS free
     FROM lot l JOIN stock_balance b ON b.lot_id = l.id
     WHERE l.leather_id IN (SELECT value FROM json_each(?)) AND b.on_hand > b.reserved ORDER BY l.id`,
     [JSON.stringify(leatherIds)],
@@ -60,6 +62,7 @@ export function toRackLot(row: LotRow): LeatherStock['lots'][number] {
     tag: row.tag,
     place: row.place,
     shade: row.shade,
+    weightOz: unscaledText(row.weight_oz, 3),
     receivedOn: row.received_on,
     freeArea: row.free,
     measuredArea: row.measured_area_mm2,

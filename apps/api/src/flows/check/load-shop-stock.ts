@@ -1,5 +1,5 @@
 import { usableOf, type ItemStock, type LeatherStock, type ShopStock } from '@hidewright/domain';
-import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { unscaled, unscaledText } from '../../db/columns/scaled-decimal.ts';
 import type { Work } from '../../work.ts';
 import { readItemSources, type ItemSource } from '../order-suggestions/item-sources.ts';
 import { boughtKinds, boughtLeathers, type BoughtLeather } from './bought-rows.ts';
@@ -95,6 +95,10 @@ function toLeatherStock(
   return {
     leatherId: leather.id,
     name: leather.name,
+    weight: {
+      weightLowOz: unscaledText(leather.weight_low_oz, 3),
+      weightHighOz: unscaledText(leather.weight_high_oz, 3),
+    },
     lots,
     owed: usable - onRack,
     pool: {

@@ -12,6 +12,7 @@ import { findOrder } from '../../modules/orders/find-order.ts';
 import { PatternVersion } from '../../modules/patterns/pattern-version.entity.ts';
 import { definitionOf, findPattern } from '../../modules/patterns/pattern-versions.ts';
 import { estimateOf } from '../job-estimate.ts';
+import { readSetLines } from '../set-hardware.ts';
 import { ticketLogs, ticketSteps } from './ticket-steps.ts';
 import { ticketHardware } from './ticket-hardware.ts';
 import { stockOfJob, ticketLots } from './ticket-stock.ts';
@@ -79,11 +80,13 @@ async function orderFields(em: EntityManager, job: Job) {
 async function madeOf(em: EntityManager, job: Job) {
   const version = await em.findOneOrFail(PatternVersion, job.patternVersionId);
   const pattern = await findPattern({ em }, version.patternId);
-  const { needsDie, needsPlate } = definitionOf(version);
+  const definition = definitionOf(version);
+  const { needsDie, needsPlate } = definition;
   const { leatherId, leatherAreaMm2, hardware } = estimateOf(job);
   const leather = await em.findOneOrFail(Leather, leatherId);
   const stock = await stockOfJob(em, job.id);
-  const { customerId } = await findOrder(em, job.orderId);
+  const { customerId, optionName } = await findOrder(em, job.orderId);
+  const [setLines = []] = await readSetLines(em, [{ definition, option: optionName }]);
   const tool = (kind: 'cutting die' | 'stamp plate') =>
     ticketTool(em, job, { kind, patternId: pattern.id, customerId });
   return {
@@ -96,7 +99,7 @@ async function madeOf(em: EntityManager, job: Job) {
     needsPlate,
     die: needsDie ? await tool('cutting die') : null,
     plate: needsPlate ? await tool('stamp plate') : null,
-    lots: await ticketLots(em, stock, leatherId),
+    lots: await ticketLots(em, stock, leatherId, setLines),
     ...(await ticketHardware(em, stock, hardware)),
   };
 }

@@ -5,6 +5,8 @@ import { Lot } from '../../modules/lots/lot.entity.ts';
 import { Reservation } from '../../modules/stock/reservation.entity.ts';
 import { StockBalance } from '../../modules/stock/stock-balance.entity.ts';
 import { StockMovement } from '../../modules/stock/stock-movement.entity.ts';
+import type { SetLine } from '../set-hardware.ts';
+import { misfitsWith } from './lot-misfits.ts';
 import { mixesOf } from './lot-mixes.ts';
 
 type Keyed = { lotId: number | null; hardwareId: number | null };
@@ -47,6 +49,7 @@ export async function ticketLots(
   em: EntityManager,
   stock: JobStock,
   leatherId: number,
+  setLines: readonly SetLine[],
 ): Promise<JobLot[]> {
   const own = stock.rows.flatMap(({ lotId }) => (lotId === null ? [] : [lotId]));
   const lots = await em.find(
@@ -67,6 +70,7 @@ export async function ticketLots(
       held: stock.held({ lotId: lot.id }),
       ...(balances.get(`lot ${lot.id}`) ?? nothingThere),
       taken: stock.taken({ lotId: lot.id }),
+      misfits: misfitsWith(lot, setLines),
     }))
     .filter(({ held, free, taken }) => held > 0 || free > 0 || taken > 0)
     .sort((a, b) => b.held - a.held || b.taken - a.taken);

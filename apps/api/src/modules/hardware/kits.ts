@@ -2,7 +2,7 @@ import type { EntityManager } from '@mikro-orm/sqlite';
 import { KitPart } from './kit-part.entity.ts';
 
 /** The parts of each kit among these, by the kit's number; what is no kit is not in it. */
-export async function kitsAmong(
+async function kitsAmong(
   em: EntityManager,
   ids: readonly number[],
 ): Promise<Map<number, KitPart[]>> {
@@ -11,6 +11,43 @@ export async function kitsAmong(
   for (const part of parts) kits.set(part.kitId, [...(kits.get(part.kitId) ?? []), part]);
   return kits;
 }
+
+/** A kind of hardware with its parts: [hardware, how many] of a kit, as JSON. */
+export interface WithParts {
+  id: number;
+  parts: string;
+}
+
+/**
+ * These kinds of hardware and the parts of each kit among them, a row each with the columns that are asked for: in
+ * plain SQL, since every price and every check asks for them.
+ */
+export function kindsWithParts<Row extends WithParts>(
+  em: EntityManager,
+  ids: readonly number[],
+  columns: readonly string[],
+): Promise<Row[]> {
+  return em.execute<Row[]>(
+    `WITH named (id) AS (SELECT DISTINCT value FROM json_each(?))
+    SELECT h.id, ${columns.map((column) => `h.${column}`).join(', ')},
+      (SELECT json_group_array(json_array(k.hardware_id, k.quantity) ORDER BY k.id) FROM kit_part k
+        WHERE k.kit_id = h.id AND h.id IN (SELECT id FROM named)) AS parts
+    FROM hardware h
+    WHERE h.id IN (SELECT id FROM named
+      UNION SELECT hardware_id FROM kit_part WHERE kit_id IN (SELECT id FROM named))`,
+    [JSON.stringify(ids)],
+  );
+}
+
+/** The parts of a kind that such a row holds, by the rows that came with it. */
+export const partsAmong = <Row extends WithParts>(
+  { parts }: WithParts,
+  byId: ReadonlyMap<number, Row>,
+): { part: Row; quantity: number }[] =>
+  (JSON.parse(parts) as [number, number][]).flatMap(([id, quantity]) => {
+    const part = byId.get(id);
+    return part === undefined ? [] : [{ part, quantity }];
+  });
 
 interface Counted {
   hardwareId: number;

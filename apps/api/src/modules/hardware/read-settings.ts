@@ -1,47 +1,56 @@
-import type { Setting, Stack } from '@hidewright/domain';
+import type { Setting } from '@hidewright/domain';
 import type { EntityManager } from '@mikro-orm/sqlite';
-import type { Leather } from '../leathers/leather.entity.ts';
-import { Hardware } from './hardware.entity.ts';
-import { kitsAmong } from './kits.ts';
+import { unscaledText } from '../../db/columns/scaled-decimal.ts';
+import type { Hardware } from './hardware.entity.ts';
+import { kindsWithParts, partsAmong, type WithParts } from './kits.ts';
 
 /** Which kind it is, and how it is set. */
-export type NamedSetting = Setting & Pick<Hardware, 'id' | 'name' | 'unit'>;
+type NamedSetting = Setting & Pick<Hardware, 'id' | 'name' | 'unit'>;
 
 /** With the parts of a kit. */
-interface KitSetting extends NamedSetting {
+export interface KitSetting extends NamedSetting {
   parts: NamedSetting[];
 }
+
+interface SettingRow extends WithParts {
+  name: string;
+  unit: Hardware['unit'];
+  post_length_mm: number | null;
+  stack_min_mm: number | null;
+  stack_max_mm: number | null;
+  setting_die: string;
+  setting_die_here: number;
+}
+
+const columns = [
+  ...['name', 'unit', 'post_length_mm', 'stack_min_mm', 'stack_max_mm'],
+  ...['setting_die', 'setting_die_here'],
+];
 
 /** What is known of setting these kinds of hardware, by their number. */
 export async function readSettings(
   em: EntityManager,
   ids: readonly number[],
 ): Promise<Map<number, KitSetting>> {
-  const kits = await kitsAmong(em, ids);
-  const partIds = [...kits.values()].flat().map(({ hardwareId }) => hardwareId);
-  const found = await em.find(Hardware, { id: { $in: [...ids, ...partIds] } });
-  const byId = new Map(found.map((kind) => [kind.id, settingOf(kind)]));
+  const rows = await kindsWithParts<SettingRow>(em, ids, columns);
+  const byId = new Map(rows.map((row) => [row.id, row]));
   return new Map(
-    [...byId].map(([id, setting]) => {
-      const parts = (kits.get(id) ?? []).flatMap((part) => byId.get(part.hardwareId) ?? []);
-      return [id, { ...setting, parts }];
+    rows.map((row) => {
+      const parts = partsAmong(row, byId).map(({ part }) => settingOf(part));
+      return [row.id, { ...settingOf(row), parts }];
     }),
   );
 }
 
-const settingOf = ({ id, name, unit, settingDie, settingDieHere, ...kind }: Hardware) => ({
-  ...{ id, name, unit, settingDie, settingDieHere },
-  postLengthMm: kind.postLengthMm?.toString() ?? null,
-  stackMinMm: kind.stackMinMm?.toString() ?? null,
-  stackMaxMm: kind.stackMaxMm?.toString() ?? null,
+const settingOf = (row: SettingRow): NamedSetting => ({
+  id: row.id,
+  name: row.name,
+  unit: row.unit,
+  postLengthMm: lengthText(row.post_length_mm),
+  stackMinMm: lengthText(row.stack_min_mm),
+  stackMaxMm: lengthText(row.stack_max_mm),
+  settingDie: row.setting_die,
+  settingDieHere: row.setting_die_here === 1,
 });
 
-/** What a line of a pattern's hardware is set through: its layers of the pattern's leather. */
-export const stackOf = (
-  { layers = null }: { layers?: number | null | undefined },
-  leather: Leather | null,
-): Stack => ({
-  layers,
-  weightLowOz: leather?.weightLowOz?.toString() ?? null,
-  weightHighOz: leather?.weightHighOz?.toString() ?? null,
-});
+const lengthText = (nanometres: number | null): string | null => unscaledText(nanometres, 6);

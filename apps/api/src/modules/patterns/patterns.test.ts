@@ -284,6 +284,11 @@ describe('a pattern is refused', () => {
       'definition.hardware.0.fromStep',
     ],
     [
+      'with an option that adds hardware for a step that is not there',
+      { options: [{ name: 'Ringed', swaps: [{ ...swap(null, 1), fromStep: 1 }] }] },
+      'definition.options.0.swaps.0.fromStep',
+    ],
+    [
       'with a longest wait that is over before the shortest',
       { work: { kind: 'steps', steps: [{ ...step, shortestWait: '60', longestWait: '30' }] } },
       'definition.work.steps.0.longestWait',
@@ -307,6 +312,14 @@ describe('a pattern is refused', () => {
       'with an option that leaves out what is not there',
       { options: [{ name: 'Plain', swaps: [swap(1, null)] }] },
       'definition.options.0.swaps.0.hardwareId',
+    ],
+    [
+      'with an option that says another step than the line that it replaces',
+      {
+        hardware: [{ hardwareId: 1, perPiece: 1 }],
+        options: [{ name: 'Brass', swaps: [{ ...swap(1, 2), fromStep: 0 }] }],
+      },
+      'definition.options.0.swaps.0.fromStep',
     ],
     [
       'with two options of one name',

@@ -44,16 +44,26 @@ export function supplyWords({ name, cost, per }: Supply): string {
   return cost === undefined ? name : `${name}, ${unitPriceText(cost)} ${perWords[per]}`;
 }
 
-/** With a brass ring: D-ring in place of Buckle */
-export function optionWords({ name, swaps }: Option, names: Names): string {
-  return `${name}: ${swaps.map((swap) => swapWords(swap, names)).join('; ')}`;
+/** With a brass ring: 1 × D-ring in place of Buckle; 1 × Snap more, from step 4 Fold and rivet on */
+export function optionWords(
+  { name, swaps }: Option,
+  names: Names,
+  work: PatternDefinition['work'],
+): string {
+  return `${name}: ${swaps.map((swap) => swapWords(swap, names, work)).join('; ')}`;
 }
 
-function swapWords({ hardwareId, byHardwareId, perPiece }: Option['swaps'][number], names: Names) {
+function swapWords(
+  { hardwareId, byHardwareId, perPiece, fromStep }: Option['swaps'][number],
+  names: Names,
+  work: PatternDefinition['work'],
+) {
   const out = hardwareId === null ? undefined : nameOf(names, hardwareId);
   if (byHardwareId === null) return `without ${out ?? 'anything else'}`;
   const comes = `${countText(perPiece)} × ${nameOf(names, byHardwareId)}`;
-  return out === undefined ? `${comes} more` : `${comes} in place of ${out}`;
+  if (out !== undefined) return `${comes} in place of ${out}`;
+  const from = typeof fromStep === 'number' ? `, ${fromStepWords(fromStep, work)}` : '';
+  return `${comes} more${from}`;
 }
 
 /** each doubling leaves 90 %, running average (Wright), times from a run of 50 */

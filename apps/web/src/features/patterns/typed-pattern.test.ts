@@ -1,6 +1,6 @@
 import type { PatternDefinition, Workshop } from '@hidewright/contract';
 import { describe, expect, it } from 'vitest';
-import { afterMove, afterRemoval, blankSwap } from './typed-parts.ts';
+import { afterMove, afterRemoval, blankSwap, linesThatWait } from './typed-parts.ts';
 import { blankPattern, patternBody, patternForm, typedPattern } from './typed-pattern.ts';
 
 const startingValues = { spacingMm: '2', trimMm: '3', rejectPercent: '10' } as Workshop;
@@ -48,7 +48,7 @@ const full: PatternDefinition = {
       swaps: [
         { hardwareId: 2, byHardwareId: 4, perPiece: 1 },
         { hardwareId: 3, byHardwareId: null, perPiece: 1 },
-        { hardwareId: null, byHardwareId: 5, perPiece: 2 },
+        { hardwareId: null, byHardwareId: 5, perPiece: 2, fromStep: 1 },
       ],
     },
   ],
@@ -162,7 +162,11 @@ describe('a pattern in its form', () => {
   it('lets hardware wait for no step that is gone, and nothing be counted that is left out', () => {
     const typed = typedFull();
     typed.definition.work.steps.pop();
-    const swaps = [{ hardwareId: 3, byHardwareId: null, perPiece: '' }];
+    const swaps = [
+      { hardwareId: 3, byHardwareId: null, perPiece: '' },
+      { hardwareId: '', byHardwareId: 5, perPiece: 1, fromStep: 1 },
+      { hardwareId: 2, byHardwareId: 4, perPiece: 1, fromStep: 0 },
+    ];
     typed.definition['options'] = [{ name: 'Without rivets', swaps }];
     const { definition } = patternBody(typed);
     expect(definition['hardware']).toEqual([
@@ -170,7 +174,16 @@ describe('a pattern in its form', () => {
       { hardwareId: 3, perPiece: 2 },
       { hardwareId: 6, perPiece: 45, per: 'hundred' },
     ]);
-    expect(definition['options']).toMatchObject([{ swaps: [{ byHardwareId: null, perPiece: 1 }] }]);
+    expect(definition['options']).toEqual([
+      {
+        name: 'Without rivets',
+        swaps: [
+          { hardwareId: 3, byHardwareId: null, perPiece: 1 },
+          { hardwareId: null, byHardwareId: 5, perPiece: 1 },
+          { hardwareId: 2, byHardwareId: 4, perPiece: 1 },
+        ],
+      },
+    ]);
   });
 
   it('is told beside the field what an option or a supply lacks', () => {
@@ -191,6 +204,17 @@ describe('hardware that waits for a step', () => {
   it('goes with it when steps change places', () => {
     expect([0, 1, 2, 3].map((step) => afterMove(step, 0, 2))).toEqual([2, 0, 1, 3]);
     expect([0, 1, 2, 3].map((step) => afterMove(step, 3, 1))).toEqual([0, 2, 3, 1]);
+  });
+
+  it('is found among the pattern’s own and what its options add', () => {
+    expect(linesThatWait({ ...full, hardware: full.hardware.slice(1) })).toEqual([
+      'definition.hardware.0',
+      'definition.hardware.1',
+      'definition.options.0.swaps.0',
+      'definition.options.0.swaps.1',
+      'definition.options.0.swaps.2',
+    ]);
+    expect(linesThatWait({ hardware: [] })).toEqual([]);
   });
 
   it('waits for none once its step is gone', () => {

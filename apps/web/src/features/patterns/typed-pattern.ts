@@ -106,12 +106,13 @@ export function layoutBody(definition: Typed): Typed {
 function definitionBody(definition: Typed): Typed {
   const work = definition['work'] as Typed;
   const hardware = definition['hardware'] as Typed[];
+  const steps = stepCount(work);
   return {
     ...layoutBody(definition),
     leatherId: definition['leatherId'],
     ...filled(pick(definition, ['leatherExtraPercent'])),
-    hardware: hardware.map((line) => hardwareBody(line, stepCount(work))),
-    ...partsBody(definition),
+    hardware: hardware.map((line) => hardwareBody(line, steps)),
+    ...partsBody(definition, steps),
     work: workBody(work),
     needsDie: definition['needsDie'],
     needsPlate: definition['needsPlate'],

@@ -16,6 +16,7 @@ import { jobQuery } from '../jobs.queries.ts';
 import { heldWords } from '../held-words.ts';
 import { standsInText } from '../stand-in-words.ts';
 import { BringHardwareBack, BringLeatherBack } from './bring-back.tsx';
+import { MisfitNotice } from './misfit-notice.tsx';
 import { MixNotice } from './mix-notice.tsx';
 import { OffcutBack } from './offcut-back.tsx';
 import { TakeOther } from './take-other.tsx';
@@ -74,6 +75,7 @@ export function StockCard({ job, canTake }: StockCardProps) {
             detail={lotLine(lot, (mm2) => rackAreaText(mm2, workshop))}
           >
             {canTake && lot.heldAreaMm2 !== '0' && <MixNotice lot={lot} />}
+            {!cancelled && job.state !== 'finished' && isOfJob(lot) && <MisfitNotice lot={lot} />}
             {givesBack && lot.takenAreaMm2 !== '0' && (
               <>
                 <BringLeatherBack job={job} lot={lot} />
@@ -166,6 +168,10 @@ export function StockCard({ job, canTake }: StockCardProps) {
 
 /** When what was taken is on the bench, and may come off it. */
 const atWork: ReadonlySet<Job['state']> = new Set(['at the bench', 'paused']);
+
+/** Whether the job holds some of it, or has taken some. */
+const isOfJob = ({ heldAreaMm2, takenAreaMm2 }: JobLot): boolean =>
+  heldAreaMm2 !== '0' || takenAreaMm2 !== '0';
 
 const lotKey = 'lotId' as never;
 const hardwareKey = 'hardwareId' as never;

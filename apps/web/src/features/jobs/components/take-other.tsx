@@ -14,6 +14,7 @@ import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { useHoldForJob, useTakeForJob } from '../jobs.mutations.ts';
 import { standsInText } from '../stand-in-words.ts';
+import { MisfitNotice } from './misfit-notice.tsx';
 import { MixNotice } from './mix-notice.tsx';
 
 const does = {
@@ -104,16 +105,22 @@ function MoveLeather(props: MoveProps) {
       submitSize="bench"
     >
       <SelectField name="lotId" label="Lot" choices={choices} />
-      <ChosenMix job={job} />
+      <ChosenLot job={job} />
       <AreaField name="areaMm2" label="How much" />
     </Form>
   );
 }
 
-/** Of the lot that is chosen just now. */
-function ChosenMix({ job }: { job: Job }) {
+/** What speaks against the lot that is chosen just now. */
+function ChosenLot({ job }: { job: Job }) {
   const chosen = Number(useWatch({ name: 'lotId' }));
-  return <MixNotice lot={job.lots.find(({ lotId }) => lotId === chosen)} />;
+  const lot = job.lots.find(({ lotId }) => lotId === chosen);
+  return (
+    <>
+      <MixNotice lot={lot} />
+      <MisfitNotice lot={lot} />
+    </>
+  );
 }
 
 function MoveHardware(props: MoveProps) {

@@ -2,21 +2,16 @@ import { useWatch } from 'react-hook-form';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { More } from '../../../components/more.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
-import { SelectField } from '../../../components/select-field.tsx';
 import { FieldRow } from './field-row.tsx';
-
-interface Work {
-  kind?: string;
-  steps?: { name?: string }[];
-}
+import { NeededForField, useStepsToWaitFor } from './needed-for-field.tsx';
 
 /** From when a line of hardware is needed, and how much of it is spoiled. */
 export function MoreOfHardware({ at }: { at: number }) {
   const line = `definition.hardware.${at}`;
-  const [work, fromStep, lossPercent, layers] = useWatch({
-    name: ['definition.work', `${line}.fromStep`, `${line}.lossPercent`, `${line}.layers`],
-  }) as [Work, unknown, unknown, unknown];
-  const choices = stepChoices(work);
+  const [fromStep, lossPercent, layers] = useWatch({
+    name: [`${line}.fromStep`, `${line}.lossPercent`, `${line}.layers`],
+  }) as unknown[];
+  const choices = useStepsToWaitFor();
   const notes = [
     choices.find(({ value }) => value === fromStep)?.label,
     lossPercent ? `${String(lossPercent)} % spoiled` : undefined,
@@ -30,14 +25,7 @@ export function MoreOfHardware({ at }: { at: number }) {
     >
       <FieldRow>
         <div className="col-span-2 min-w-56 grow">
-          <SelectField
-            key={choices.length}
-            name={`${line}.fromStep`}
-            label="Needed for"
-            placeholder="only the pieces ordered"
-            choices={choices}
-            help="Pieces that fail later have used it up."
-          />
+          <NeededForField name={`${line}.fromStep`} />
         </div>
         <DecimalField
           name={`${line}.lossPercent`}
@@ -56,12 +44,4 @@ export function MoreOfHardware({ at }: { at: number }) {
       </FieldRow>
     </More>
   );
-}
-
-function stepChoices(work: Work) {
-  if (work.kind !== 'steps') return [{ value: 0, label: 'every piece that is cut' }];
-  return (work.steps ?? []).map(({ name = '' }, step) => ({
-    value: step,
-    label: `every piece that reaches step ${step + 1} ${name}`.trim(),
-  }));
 }

@@ -6,7 +6,7 @@ import { Button } from '../../../components/button.tsx';
 import { DecimalField } from '../../../components/decimal-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
-import { afterMove, afterRemoval } from '../typed-parts.ts';
+import { afterMove, afterRemoval, linesThatWait } from '../typed-parts.ts';
 import { blankStep } from '../typed-work.ts';
 import { FieldRow } from './field-row.tsx';
 import { MoreOfStep } from './more-of-step.tsx';
@@ -62,11 +62,11 @@ export function StepFields() {
 function useHardwareThatFollows() {
   const { getValues, setValue } = useFormContext();
   return (follow: (step: number) => number | undefined) => {
-    const lines = (getValues('definition.hardware') ?? []) as { fromStep?: unknown }[];
-    lines.forEach(({ fromStep }, at) => {
-      if (typeof fromStep !== 'number') return;
-      setValue(`definition.hardware.${at}.fromStep`, follow(fromStep), { shouldDirty: true });
-    });
+    for (const line of linesThatWait(getValues('definition') as Record<string, unknown>)) {
+      const step: unknown = getValues(`${line}.fromStep`);
+      if (typeof step !== 'number') continue;
+      setValue(`${line}.fromStep`, follow(step), { shouldDirty: true });
+    }
   };
 }
 

@@ -8,6 +8,7 @@ import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { hardwareChoicesQuery, hardwareNamesQuery } from '../patterns.queries.ts';
 import { blankSwap } from '../typed-parts.ts';
 import { RemoveButton } from '../../../components/remove-button.tsx';
+import { NeededForField } from './needed-for-field.tsx';
 
 const most = 10;
 
@@ -71,7 +72,8 @@ function SwapRow({ swap, lines, taken, kept, names, onRemove, word }: SwapRowPro
   // What is chosen stays in sight although it is there no more: the mistake can be seen then.
   const out = choicesOf(names, [...taken, Number(typed?.hardwareId ?? 0)]);
   const comes = choicesOf(names, [...kept, Number(typed?.byHardwareId ?? 0)]);
-  // What comes in its place is counted as that was.
+  const adds = Number(typed?.byHardwareId ?? 0) > 0 && Number(typed?.hardwareId ?? 0) === 0;
+  // What comes in its place is counted as that was, and from the same step on.
   const replaced = lines.find(({ hardwareId }) => Number(hardwareId) === Number(typed?.hardwareId));
   return (
     <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
@@ -102,6 +104,11 @@ function SwapRow({ swap, lines, taken, kept, names, onRemove, word }: SwapRowPro
           unit={perWords[replaced?.per ?? 'piece']}
           whenEmpty="text"
         />
+      )}
+      {adds && (
+        <div className="min-w-56 grow basis-56">
+          <NeededForField name={`${swap}.fromStep`} />
+        </div>
       )}
       {onRemove && <RemoveButton label={word} onRemove={onRemove} />}
     </div>

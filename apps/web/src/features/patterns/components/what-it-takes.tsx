@@ -39,7 +39,7 @@ export function WhatItTakes({ pattern }: { pattern: Pattern }) {
         <List word="used up" lines={definition.supplies?.map(supplyWords)} />
         <List
           word="options"
-          lines={definition.options?.map((option) => optionWords(option, known))}
+          lines={definition.options?.map((option) => optionWords(option, known, work))}
         />
         <Line word="tooling">{tooling.length === 0 ? 'none' : tooling.join(', ')}</Line>
         <WorkLines definition={definition} />
