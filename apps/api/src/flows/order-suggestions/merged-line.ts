@@ -62,8 +62,9 @@ interface Drafted {
 function soldNote(name: string, { terms, asked, drafted, say }: Drafted): string[] {
   const { minimum, multiple } = terms;
   const least = minimum !== null && asked.lt(minimum) ? [`at least ${say(minimum)}`] : [];
-  const whole =
-    multiple !== null && !asked.mod(multiple).isZero() ? [`${say(multiple)} at a time`] : [];
+  // One mm² at a time is any area.
+  const inPacks = multiple !== null && new Exact(multiple).gt(1);
+  const whole = inPacks && !asked.mod(multiple).isZero() ? [`${say(multiple)} at a time`] : [];
   const sold = [...least, ...whole].join(' and ');
   if (sold === '') return [];
   return [

@@ -270,8 +270,10 @@ describe('drafting', () => {
     const few = await draft([lineFor(await rivets(), { quantity: '7' })]).expect(201);
     expect(few.body.orders[0].lines).toMatchObject([{ quantity: 100 }]);
     expect(few.body.notes[0]).toMatch(/: 100 is drafted, for it is sold 100 at a time\.$/);
+    const any = await draft([lineFor(await leather(), { quantity: ft2(12) })]).expect(201);
+    expect(any.body.notes).toEqual([]);
     await change('leathers', things.leatherId, { wholeForm: 'side', wholeAreaMm2: ft2(22) });
-    const part = await draft([lineFor(await leather(), { quantity: ft2(30) })]).expect(201);
+    const part = await draft([lineFor(await leather(), { quantity: ft2(18) })]).expect(201);
     expect(part.body.orders[0].lines[1]).toMatchObject({ areaMm2: ft2(30) });
     expect(part.body.notes[0]).toContain(
       '30 ft² is drafted, as typed, but it is sold 22 ft² at a time.',
