@@ -3,7 +3,7 @@ import { countedWords, Exact, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { sayArea } from '../../modules/stock/say-area.ts';
 import type { Workshop } from '../../modules/workshop/workshop.entity.ts';
-import { boughtLine } from './bought-line.ts';
+import { boughtLine, unpricedNote } from './bought-line.ts';
 import type { Suggested } from './suggest-orders.ts';
 
 export interface Merged {
@@ -28,11 +28,13 @@ export function mergedLine(
   const { unit } = row;
   const say = (quantity: string) =>
     unit === 'mm2' ? sayArea(new Decimal(quantity), areaUnit) : countedWords(quantity, unit);
+  const put = typed ? { ...line, unitPrice: there.unitPrice } : line;
   return {
-    line: typed ? { ...line, unitPrice: there.unitPrice } : line,
+    line: put,
     notes: [
       ...soldNote(row.name, { terms, asked: both, drafted, say }),
       ...(typed ? [`${row.name} keeps the price that was typed on its draft.`] : []),
+      ...unpricedNote(row.name, put),
     ],
   };
 }

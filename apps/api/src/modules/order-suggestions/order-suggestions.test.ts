@@ -295,6 +295,34 @@ describe('drafting', () => {
     expect(body.orders[0].lines).toMatchObject([{ quantity: 1000, unitPrice: '0.12' }]);
   });
 
+  describe('of a thing without a price', () => {
+    const unknown = /is drafted at 0\.00, as its price is not known\. Ask for it before you send/;
+    beforeEach(async () => {
+      await sold();
+      await change('hardware', things.hardwareId, { unitPrice: '0' });
+      await change('leathers', things.leatherId, { pricePerFt2: '0' });
+    });
+
+    it('says so, of hardware and of leather', async () => {
+      const rivet = await draft([lineFor(await rivets())]).expect(201);
+      expect(rivet.body.orders[0].lines).toMatchObject([{ unitPrice: '0.00' }]);
+      expect(rivet.body.notes).toEqual([expect.stringMatching(unknown)]);
+      const side = await draft([lineFor(await leather(), { quantity: ft2(22) })]).expect(201);
+      expect(side.body.notes).toEqual([expect.stringMatching(unknown)]);
+    });
+
+    it('says no more of it once a price is typed on the draft', async () => {
+      const { supplierId, hardwareId } = things;
+      const line = { of: 'hardware', hardwareId, quantity: 500, unitPrice: '0.15' };
+      const body = { supplierId, lines: [line] };
+      await owner().post('/api/purchase-orders').send(body).expect(201);
+      const { body: more } = await draft([lineFor(await rivets(), { quantity: '200' })]).expect(
+        201,
+      );
+      expect(more.notes).not.toContainEqual(expect.stringMatching(unknown));
+    });
+  });
+
   it('says what to do where nobody is named who sells it', async () => {
     const { body } = await draft([lineFor(await rivets())]).expect(201);
     expect(body.orders).toEqual([]);
