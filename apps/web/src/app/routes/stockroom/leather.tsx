@@ -15,7 +15,7 @@ import { leatherQuery } from '../../../features/leathers/leathers.queries.ts';
 import { LotsTable } from '../../../features/lots/components/lots-table.tsx';
 import { lotsQuery } from '../../../features/lots/lots.queries.ts';
 import { OffersCard } from '../../../features/supplier-offers/components/offers-card.tsx';
-import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
 import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';

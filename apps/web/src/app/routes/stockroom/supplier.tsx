@@ -10,7 +10,7 @@ import { ShowEarlier } from '../../../components/show-earlier.tsx';
 import { PurchaseOrdersTable } from '../../../features/purchase-orders/components/purchase-orders-table.tsx';
 import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { SoldList } from '../../../features/supplier-offers/components/sold-list.tsx';
-import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { ChangeSupplierForm } from '../../../features/suppliers/components/change-supplier-form.tsx';
 import { SupplierFacts } from '../../../features/suppliers/components/supplier-facts.tsx';
 import { supplierQuery } from '../../../features/suppliers/suppliers.queries.ts';

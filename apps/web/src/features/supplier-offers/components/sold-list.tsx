@@ -5,7 +5,7 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { areaPriceText, unitPriceText } from '../../../lib/formatting.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { supplierOffersQuery } from '../supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 
 /** What one supplier sells, as far as it was entered. */
 export function SoldList({ supplierId }: { supplierId: number }) {
