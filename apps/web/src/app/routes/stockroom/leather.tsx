@@ -17,7 +17,7 @@ import { lotsQuery } from '../../../features/lots/lots.queries.ts';
 import { OffersCard } from '../../../features/supplier-offers/components/offers-card.tsx';
 import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
-import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
+import { askedPriceText, rackAreaText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -105,7 +105,7 @@ function Facts({ leather }: { leather: Leather }) {
   const { pricePerFt2, supplierName } = leather;
   const price = pricePerFt2 !== undefined && {
     word: `Price, ${currency} per ${areaUnits[areaUnit].sign}`,
-    figure: areaPriceText(pricePerFt2, areaUnit),
+    figure: askedPriceText(pricePerFt2, areaUnit),
     note: supplierName ?? undefined,
   };
   return (

@@ -6,7 +6,7 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { countText, moneyText, askedPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 const counted = (
@@ -27,7 +27,8 @@ function pricesIn(currency: string): Column<Hardware>[] {
       id: 'price',
       header: `Price, ${currency}`,
       value: (row) => row.unitPrice,
-      cell: (row) => row.unitPrice !== undefined && unitPriceText(row.unitPrice),
+      cell: ({ unitPrice, fromCustomer }) =>
+        unitPrice !== undefined && !fromCustomer && askedPriceText(unitPrice),
       align: 'right',
     },
     {

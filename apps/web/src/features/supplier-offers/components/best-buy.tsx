@@ -5,14 +5,16 @@ import { PlainField } from '../../../components/plain-field.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { areaUnits, readArea } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { buyMoreText, neededFault, quantityText } from '../offer-words.ts';
+import { buyMoreText, hasPrice, leftOutText, neededFault, quantityText } from '../offer-words.ts';
 
 type Unit = SupplierOfferReply['unit'];
 
-/** What a quantity really costs from each supplier, the least dear first. */
-export function BestBuy({ offers }: { offers: readonly SupplierOfferReply[] }) {
+/** What a quantity really costs from each supplier whose price is known, the least dear first. */
+export function BestBuy({ offers: all }: { offers: readonly SupplierOfferReply[] }) {
   const workshop = useWorkshop();
   const [text, setText] = useState('');
+  const offers = all.filter(hasPrice);
+  if (offers.length === 0) return null;
   const unit = offers[0]?.unit ?? 'piece';
   const needed = readNeeded(text, unit, workshop);
   const wrong = text.trim() !== '' && needed === undefined;
@@ -27,7 +29,12 @@ export function BestBuy({ offers }: { offers: readonly SupplierOfferReply[] }) {
         onChange={setText}
       />
       <div role="status">
-        {needed !== undefined && <Answers buys={buysFor(offers, needed, unit)} offers={offers} />}
+        {needed !== undefined && (
+          <>
+            <Answers buys={buysFor(offers, needed, unit)} offers={offers} />
+            <p className="mt-3 text-sm text-ink-soft empty:hidden">{leftOutText(all)}</p>
+          </>
+        )}
       </div>
     </div>
   );

@@ -1,8 +1,9 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
+import { isPriceKnown } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { Card } from '../../../components/card.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaPriceText, unitPriceText } from '../../../lib/formatting.ts';
+import { askedPriceText } from '../../../lib/formatting.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
@@ -26,11 +27,12 @@ export function SoldList({ supplierId }: { supplierId: number }) {
 function SoldItem({ offer }: { offer: SupplierOfferReply }) {
   const { areaUnit, currency } = useWorkshop();
   const { of, leatherId, hardwareId, name, breaks = [], articleNumber } = offer;
-  const prices = breaks.map(({ price }) =>
-    of === 'leather' ? areaPriceText(price, areaUnit) : unitPriceText(price),
-  );
+  const prices = breaks
+    .filter(({ price }) => isPriceKnown(price))
+    .map(({ price }) => askedPriceText(price, of === 'leather' ? areaUnit : undefined));
   const detail = [
     articleNumber && `article ${articleNumber}`,
+    breaks.length > 0 && prices.length === 0 && 'price not known',
     prices.length > 0 &&
       `${prices.join(', ')} ${currency} per ${of === 'leather' ? areaUnits[areaUnit].sign : 'piece'}`,
     offer.preferred && 'usually bought here',
