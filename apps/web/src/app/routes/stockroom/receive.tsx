@@ -26,7 +26,6 @@ import {
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { choicesOf } from './choices.ts';
-import { useRole } from './use-role.ts';
 
 export async function loader({ request }: LoaderFunctionArgs) {
   const orderId = Number(new URL(request.url).searchParams.get('order'));
@@ -43,7 +42,6 @@ export async function loader({ request }: LoaderFunctionArgs) {
 export function Component() {
   const loaded = useLoaderData<PurchaseOrder | null>();
   const [search] = useSearchParams();
-  const { handlesStock } = useRole();
   const { data: order = loaded } = useQuery({
     ...purchaseOrderQuery(loaded?.id ?? 0),
     enabled: loaded !== null,
@@ -54,11 +52,11 @@ export function Component() {
   return (
     <>
       <PageHeader title={title} subtitle={order?.supplierName} />
-      {!handlesStock && <EmptyState title="The owner and the maker receive deliveries." />}
-      {handlesStock && saysWhat(search) && (
+      {saysWhat(search) ? (
         <Receiving key={String(search)} asked={order} onReceived={setReceived} />
+      ) : (
+        <Choosing />
       )}
-      {handlesStock && !saysWhat(search) && <Choosing />}
     </>
   );
 }
