@@ -74,6 +74,7 @@ export function Component() {
           aside={<TextLink to={`/stockroom/ledger?leather=${id}`}>What moved of it</TextLink>}
         >
           <LotsTable
+            ofOneLeather
             rows={lots.data?.pages.flatMap((page) => page.items) ?? []}
             empty={
               <EmptyState title="None of it is on the rack." action={receive}>

@@ -52,6 +52,7 @@ export function Component() {
           <SoldList supplierId={id} />
           <Card title="Orders to them">
             <PurchaseOrdersTable
+              toOneSupplier
               rows={orders.data?.pages.flatMap((page) => page.items) ?? []}
               empty={<EmptyState title="Nothing was ordered from them yet." action={order} />}
               after={<ShowEarlier pages={orders} what="orders" />}

@@ -21,6 +21,10 @@ export function BestBuy({ offers: all }: { offers: readonly SupplierOfferReply[]
   const sign = unit === 'mm2' ? areaUnits[workshop.areaUnit].sign : 'pieces';
   return (
     <div className="mt-5 border-t border-stitch pt-4">
+      <p className="mb-3 max-w-prose text-ink-soft">
+        Where does it cost least? Type what you need: what it comes to at each supplier stands here,
+        with minimum, packs and price breaks.
+      </p>
       <PlainField
         label={unit === 'mm2' ? 'So much is needed' : 'So many are needed'}
         unit={sign}

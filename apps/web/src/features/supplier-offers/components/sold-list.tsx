@@ -14,7 +14,10 @@ export function SoldList({ supplierId }: { supplierId: number }) {
   const offers = data?.items ?? [];
   if (offers.length === 0) return null;
   return (
-    <Card title="What they sell" subtitle="as entered with each leather and hardware">
+    <Card
+      title="What they sell"
+      subtitle="as far as their prices are entered with the leather or the hardware"
+    >
       <ul className="space-y-2">
         {offers.map((offer) => (
           <SoldItem key={offer.id} offer={offer} />
