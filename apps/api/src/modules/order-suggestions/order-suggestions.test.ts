@@ -224,6 +224,49 @@ describe('a point and a quantity set by hand', () => {
     });
   });
 
+  it.each([
+    ['at what was paid', '0.17', '9', ['0.17', '9.00']],
+    ['at 0.00 where no price was known', '0', '0', ['0.00', '0.00']],
+  ])(
+    'are ordered from whom it was bought before somebody else made an offer, %s',
+    async (_what, unitPrice, pricePerFt2, drafted) => {
+      const { supplierId, hardwareId, leatherId } = things;
+      await change('hardware', hardwareId, { supplierId, unitPrice });
+      await change('leathers', leatherId, {
+        pricePerFt2,
+        wholeForm: 'side',
+        wholeAreaMm2: ft2(22),
+      });
+      const other = await stockUp(shop);
+      const first = { supplierId: other.supplierId, breaks: [{ from: '0', price: '0.01' }] };
+      await owner()
+        .post('/api/supplier-offers')
+        .send({ hardwareId, ...first })
+        .expect(201);
+      await owner()
+        .post('/api/supplier-offers')
+        .send({ leatherId, ...first })
+        .expect(201);
+      await set({ point: '700', quantity: '850' });
+      const side = await leather();
+      await owner()
+        .patch(`/api/order-suggestions/leather/${leatherId}`)
+        .set('If-Match', `"${side.version}"`)
+        .send({ point: ft2(10), quantity: ft2(30) })
+        .expect(200);
+      const items = [await rivets(), await leather()];
+      expect(items).toMatchObject([
+        { supplierId, quantity: '900', usualBy: 'hand' },
+        { supplierId, quantity: ft2(44), usualBy: 'hand' },
+      ]);
+      const { body } = await draft(items.map((item) => lineFor(item))).expect(201);
+      const [order, ...others] = (body as { orders: PurchaseOrder[] }).orders;
+      expect(others).toEqual([]);
+      expect(order?.lines.map((line) => line.unitPrice)).toEqual(drafted);
+      expect(body.notes).toHaveLength(unitPrice === '0' ? 2 : 0);
+    },
+  );
+
   it('refuse parts of a piece, nothing at a time, and what somebody changed meanwhile', async () => {
     expect((await set({ quantity: '1.5' })).body.errors[0].field).toBe('quantity');
     expect((await set({ quantity: '0' })).status).toBe(422);

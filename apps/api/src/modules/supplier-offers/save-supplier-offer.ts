@@ -95,7 +95,10 @@ export async function removeOffer(work: Work, offer: SupplierOffer): Promise<voi
   await preferAnother(work, offer);
 }
 
-/** Where none for the same thing is preferred, the least dear of the others is, as far as it is known: somebody sells it still. */
+/**
+ * Where none for the same thing is preferred, the least dear of the others is, one without a price last: somebody sells
+ * it still.
+ */
 async function preferAnother(work: Work, { id, ...offer }: SupplierOffer): Promise<void> {
   const { leatherId, hardwareId } = offer;
   const all = await work.em.find(

@@ -5,7 +5,10 @@ import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { orderRemarks } from '../order-remarks.ts';
 
-/** Before a draft is sent: what its supplier does not sell like that, where more costs less or little more, and what has no price. */
+/**
+ * Before a draft is sent: what its supplier does not sell like that, where more costs less or little more, and what has
+ * no price.
+ */
 export function OrderRemarksNotice({ order }: { order: PurchaseOrder }) {
   const workshop = useWorkshop();
   const { data } = useQuery(supplierOffersQuery({ supplierId: order.supplierId }));
