@@ -26,6 +26,7 @@ import {
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { choicesOf } from './choices.ts';
+import { useRole } from './use-role.ts';
 
 export async function loader({ request }: LoaderFunctionArgs) {
   const orderId = Number(new URL(request.url).searchParams.get('order'));
