@@ -69,12 +69,10 @@ async function refused(page: Page, role: Role): Promise<string[]> {
 }
 
 describe('the pages', () => {
-  it('ask nothing that the API would refuse to whoever may enter their room', async () => {
-    const all: string[] = [];
-    for (const page of pages)
-      for (const role of roomAt(page.path)?.roles ?? []) all.push(...(await refused(page, role)));
-    expect(all).toEqual([]);
-    expect(pages.length).toBeGreaterThan(50);
+  it.each(pages)('ask nothing that the API would refuse at $path', async (page) => {
+    const room = roomAt(page.path);
+    expect(room).toBeDefined();
+    for (const role of room?.roles ?? []) expect(await refused(page, role)).toEqual([]);
   });
 
   it.each<[string, Role, string | undefined]>([
