@@ -103,3 +103,10 @@ walk('the shop’s own figures stand in the Office', async ({ page }) => {
   await page.getByText('Saved. New quotes begin with these values.').first().waitFor();
   await expectAccessible(page);
 });
+
+walk('a bookkeeper who types its address is told in the shell whose it is', async ({ page }) => {
+  await signInAs(page, hidewright.url, 'bookkeeper');
+  await visit(page, `${hidewright.url}/stockroom/to-order`);
+  await page.getByText('Only the owner or the maker can see this.').waitFor();
+  await page.getByRole('navigation', { name: 'Rooms' }).waitFor();
+});

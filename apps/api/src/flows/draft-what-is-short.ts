@@ -1,4 +1,4 @@
-import type { PurchaseLineTyped } from '@hidewright/contract';
+import type { GoodsLineTyped } from '@hidewright/contract';
 import { draftPurchaseOrder } from '../modules/purchase-orders/draft-purchase-order.ts';
 import type { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
 import { sayDay } from '../say-day.ts';
@@ -7,7 +7,7 @@ import { buyingNotes, customersBring } from './check/buying-notes.ts';
 import type { CheckedRun, CheckedRuns } from './check/checked-runs.ts';
 import { lackingOf, type Lacking } from './check/lacking.ts';
 import { sayFor } from './check/run-reply.ts';
-import { boughtLine } from './order-suggestions/bought-line.ts';
+import { boughtLine, unpricedNote } from './order-suggestions/bought-line.ts';
 
 interface Drafted {
   orders: PurchaseOrder[];
@@ -16,7 +16,8 @@ interface Drafted {
 
 /** One thing to buy, for one or several of the runs. */
 interface ToDraft {
-  line: PurchaseLineTyped;
+  name: string;
+  line: GoodsLineTyped;
   supplierId: number;
   runs: CheckedRun[];
 }
@@ -28,16 +29,22 @@ interface ToDraft {
 export async function draftWhatIsShort(work: Work, checked: CheckedRuns): Promise<Drafted> {
   const lacking = lackingOf(checked);
   const say = await sayFor(work.em);
+  const all = lacking.flatMap(toDraft);
   return {
-    orders: await draftEach(work, lacking.flatMap(toDraft)),
-    notes: [...lacking.flatMap((each) => buyingNotes(each, say)), ...customersBring(checked.runs)],
+    orders: await draftEach(work, all),
+    notes: [
+      ...lacking.flatMap((each) => buyingNotes(each, say)),
+      ...all.flatMap(({ name, line }) => unpricedNote(name, line)),
+      ...customersBring(checked.runs),
+    ],
   };
 }
 
 function toDraft({ buying, toBuy, runs, ...thing }: Lacking): ToDraft[] {
   const { supplierId, terms } = buying;
   if (toBuy === null || supplierId === null) return [];
-  return [{ line: boughtLine(thing, terms, toBuy.quantity), supplierId, runs }];
+  const line = boughtLine(thing, terms, toBuy.quantity);
+  return [{ name: thing.name, line, supplierId, runs }];
 }
 
 async function draftEach(work: Work, all: readonly ToDraft[]): Promise<PurchaseOrder[]> {

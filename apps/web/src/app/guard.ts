@@ -23,13 +23,18 @@ export const guardRoom: MiddlewareFunction = async ({ request }) => {
   throw redirect(`/closed${room.path}`);
 };
 
-/** A form opens only to those who may save it: whoever else comes by its address is told so. */
+/**
+ * A page opens only to those who may ask what it shows, a form only to those who may save it: whoever else comes by its
+ * address is told so.
+ */
 export const opensFor =
-  ({ access }: Endpoint): MiddlewareFunction =>
+  ({ access, method }: Endpoint): MiddlewareFunction =>
   async () => {
     const { person } = await queryClient.ensureQueryData(sessionQuery());
     if (typeof access === 'string' || (person && access.includes(person.role))) return;
-    const sentence = `Only the ${access.join(' or the ')} can write this. You can read what is there.`;
+    const who = `Only the ${access.join(' or the ')} can`;
+    const sentence =
+      method === 'GET' ? `${who} see this.` : `${who} write this. You can read what is there.`;
     throw new Response(sentence, { status: 403 });
   };
 

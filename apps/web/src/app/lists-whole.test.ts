@@ -9,9 +9,8 @@ import {
 import {
   awaitedOrdersQuery,
   rackQuery,
-  soldByQuery,
 } from '../features/purchase-orders/purchase-orders.queries.ts';
-import { supplierOffersQuery } from '../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../lib/supplier-offers.queries.ts';
 import { suppliersQuery } from '../features/suppliers/suppliers.queries.ts';
 
 const kept = Array.from({ length: 401 }, (_, at) => ({ id: 401 - at }));
@@ -39,9 +38,8 @@ describe('what is chosen from', () => {
     ['leathers', () => client().fetchQuery(leathersQuery())],
     ['leathers of a pattern', () => client().fetchQuery(leatherChoicesQuery())],
     ['suppliers', () => client().fetchQuery(suppliersQuery())],
-    ['offers', () => client().fetchQuery(supplierOffersQuery({ supplierId: 7 }))],
+    ['what a supplier sells', () => client().fetchQuery(supplierOffersQuery({ supplierId: 7 }))],
     ['awaited orders', () => client().fetchQuery(awaitedOrdersQuery())],
-    ['what a supplier sells', () => client().fetchQuery(soldByQuery(7))],
     ['the rack', () => client().fetchQuery(rackQuery())],
   ])('has the oldest of %s too', async (_what, read) => {
     const { items } = await read();

@@ -23,11 +23,11 @@ export const router: ReturnType<typeof createBrowserRouter> = createBrowserRoute
       { path: '/open-shop', lazy: () => import('./routes/open-shop.tsx') },
       ...linkRoutes,
       {
-        middleware: [guardSession],
         Component: Shell,
         children: [
           {
-            middleware: [guardRoom],
+            // Here and not on the shell, so that whoever is refused at a typed address is told so within it.
+            middleware: [guardSession, guardRoom],
             ErrorBoundary: RouteError,
             // Middleware runs only where something is loaded.
             loader: () => null,

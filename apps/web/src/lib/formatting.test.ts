@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import {
+  askedPriceText,
   areaText,
   dayText,
   hoursText,
@@ -21,6 +22,15 @@ describe('figures on the screen', () => {
   it('shows a unit price with two decimals, or as many as it has', () => {
     expect(unitPriceText('4.2')).toBe('4.20');
     expect(unitPriceText('0.1725')).toBe('0.1725');
+  });
+
+  it('says of a price of 0 that it is not known', () => {
+    expect(askedPriceText('4.2')).toBe('4.20');
+    expect(askedPriceText('9.5', 'dm2')).toBe('1.0226');
+    expect([askedPriceText('0'), askedPriceText('0.00', 'ft2')]).toEqual([
+      'not known',
+      'not known',
+    ]);
   });
 
   it('names units', () => {

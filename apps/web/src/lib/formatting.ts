@@ -1,4 +1,4 @@
-import { priceFromFt2, rackFootage, type AreaHabit } from '@hidewright/domain';
+import { isPriceKnown, priceFromFt2, rackFootage, type AreaHabit } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import {
   areaFigure,
@@ -64,6 +64,12 @@ export function rackAreaText(areaMm2: string, habit: AreaHabit): string {
   if (footage === undefined) return areaText(areaMm2, habit.areaUnit);
   const [, whole = '', raised = ''] = /^(.*?)([¹²³]?)$/.exec(footage) ?? [];
   return `${grouped(whole)}${raised} ${areaUnits.ft2.sign}`;
+}
+
+/** What is asked for one of what the shop buys; of leather the price of a ft², said in the shop's unit. */
+export function askedPriceText(price: string, unit?: AreaUnit): string {
+  if (!isPriceKnown(price)) return 'not known';
+  return unit === undefined ? unitPriceText(price) : areaPriceText(price, unit);
 }
 
 /** The price of a ft² in the shop's unit, without it: 9.50, or 1.0226 for a dm². */

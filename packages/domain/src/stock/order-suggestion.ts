@@ -5,7 +5,7 @@ import { dailyUse, type ItemUse } from './item-use.ts';
 import type { LeadTime } from './lead-time.ts';
 import { orderQuantity } from './order-quantity.ts';
 import { reorderPoint, type ReorderPoint } from './reorder-point.ts';
-import type { OfferTerms } from './supplier-offer.ts';
+import { isPriceKnown, type OfferTerms } from './supplier-offer.ts';
 
 /** Of one thing, in pieces, or in mm² of leather. */
 export interface OrderInput {
@@ -150,7 +150,7 @@ function economicOf({
   const breaks = terms.breaks
     .map(({ from, price }) => ({ from: Math.ceil(Number(from)), price }))
     .filter(({ from }) => from <= mostReckoned);
-  if (demand === 0 || breaks.length === 0 || breaks.some(({ price }) => Number(price) === 0))
+  if (demand === 0 || breaks.length === 0 || breaks.some(({ price }) => !isPriceKnown(price)))
     return null;
   // Every cost is multiplied by the priced amount, so that prices per ft² serve quantities in mm².
   const scaledCost = toText(new Exact(orderCost).times(pricedAmount));

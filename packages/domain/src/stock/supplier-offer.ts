@@ -33,6 +33,9 @@ export function usualOffer<Offer extends { preferred: boolean; supplierId: numbe
   );
 }
 
+/** A price of 0 stands for one that nobody knows yet: it is never the least dear, and an order at it says so. */
+export const isPriceKnown = (price: DecimalText): boolean => !new Exact(price).isZero();
+
 export interface OfferFault {
   /** 'breaks.1.from' or 'minimum' */
   field: string;

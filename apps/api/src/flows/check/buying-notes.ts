@@ -5,15 +5,19 @@ import type { Lacking } from './lacking.ts';
 /** What was not drafted and why, and where a price break made it more. */
 export function buyingNotes(lacking: Lacking, say: Say): string[] {
   const { name, buying, missing, drafted } = lacking;
-  const drafts = buying.drafts.join(' and ');
   return [
-    ...(drafted > 0
-      ? [`${missing > 0 ? `A part of the ${name}` : name} is on draft ${drafts} already: send it.`]
-      : []),
+    ...(drafted > 0 ? [draftedNote(lacking)] : []),
     ...(missing > 0 && buying.supplierId === null
       ? [`${name} has no supplier. Say who sells it, then draft again.`]
       : breakNotes(lacking, say)),
   ];
+}
+
+/** Rivet 9 mm is on draft P-0012, which you still have to send. */
+function draftedNote({ name, buying: { drafts }, missing }: Lacking): string {
+  const what = missing > 0 ? `A part of the ${name}` : name;
+  const where = drafts.length > 1 ? 'drafts' : 'draft';
+  return `${what} is on ${where} ${drafts.join(' and ')}, which you still have to send.`;
 }
 
 function breakNotes({ of, name, toBuy }: Lacking, say: Say): string[] {

@@ -3,7 +3,7 @@ import { countedWords, Exact, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { sayArea } from '../../modules/stock/say-area.ts';
 import type { Workshop } from '../../modules/workshop/workshop.entity.ts';
-import { boughtLine } from './bought-line.ts';
+import { boughtLine, unpricedNote } from './bought-line.ts';
 import type { Suggested } from './suggest-orders.ts';
 
 export interface Merged {
@@ -28,11 +28,13 @@ export function mergedLine(
   const { unit } = row;
   const say = (quantity: string) =>
     unit === 'mm2' ? sayArea(new Decimal(quantity), areaUnit) : countedWords(quantity, unit);
+  const put = typed ? { ...line, unitPrice: there.unitPrice } : line;
   return {
-    line: typed ? { ...line, unitPrice: there.unitPrice } : line,
+    line: put,
     notes: [
       ...soldNote(row.name, { terms, asked: both, drafted, say }),
       ...(typed ? [`${row.name} keeps the price that was typed on its draft.`] : []),
+      ...unpricedNote(row.name, put),
     ],
   };
 }
@@ -62,8 +64,9 @@ interface Drafted {
 function soldNote(name: string, { terms, asked, drafted, say }: Drafted): string[] {
   const { minimum, multiple } = terms;
   const least = minimum !== null && asked.lt(minimum) ? [`at least ${say(minimum)}`] : [];
-  const whole =
-    multiple !== null && !asked.mod(multiple).isZero() ? [`${say(multiple)} at a time`] : [];
+  // One mm² at a time is any area.
+  const inPacks = multiple !== null && new Exact(multiple).gt(1);
+  const whole = inPacks && !asked.mod(multiple).isZero() ? [`${say(multiple)} at a time`] : [];
   const sold = [...least, ...whole].join(' and ');
   if (sold === '') return [];
   return [

@@ -1,4 +1,4 @@
-import { afterEach, beforeEach, expect, it } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import type { OrderSuggestionReply, PurchaseOrder, RunsCheck } from '@hidewright/contract';
 import { readyForTheBench, type BenchShop } from '../../testing/bench-shop.ts';
 import { startTestShop } from '../../testing/test-shop.ts';
@@ -23,6 +23,12 @@ async function supplier(name: string, leadDays: number): Promise<number> {
 }
 
 const offer = (body: object) => owner().post('/api/supplier-offers').send(body).expect(201);
+
+async function change(path: string, body: object): Promise<void> {
+  const now = await owner().get(`/api/${path}`).expect(200);
+  const asked = owner().patch(`/api/${path}`).set('If-Match', `"${now.body.version}"`);
+  await asked.send(body).expect(200);
+}
 
 async function check(): Promise<RunsCheck> {
   return (await ready.shop.as('maker').post('/api/checks').send({ runs: runs() }).expect(200)).body;
@@ -97,6 +103,55 @@ it('takes leather by the offer as well, in ft² at its break', async () => {
   expect((await check()).short).toEqual(
     expect.arrayContaining([expect.objectContaining({ of: 'leather', arrivesOn: '2026-12-15' })]),
   );
+});
+
+describe('from whom it was bought before somebody else made an offer', () => {
+  /** Rivets and leather of those who are named, which somebody new offers for less. */
+  async function offeredForLess(rivetPrice: string, leatherPrice: string): Promise<void> {
+    const { hardwareId, leatherId } = ready;
+    await change(`hardware/${hardwareId}`, { supplierId: fittings, unitPrice: rivetPrice });
+    const sides = { wholeForm: 'side', wholeAreaMm2: '2043866.88' };
+    await change(`leathers/${leatherId}`, {
+      ...{ supplierId: oldbeck, pricePerFt2: leatherPrice },
+      ...sides,
+    });
+    const supplierId = await supplier('Brindle and Daughters', 1);
+    await offer({ hardwareId, supplierId, breaks: [{ from: '1', price: '0.01' }] });
+    await offer({ leatherId, supplierId, breaks: [{ from: '0', price: '0.50' }] });
+  }
+
+  it('is still ordered from, at what was paid, in packs and whole sides', async () => {
+    await offeredForLess('0.17', '9.5');
+    const { orders, notes } = await draft();
+    expect(orders).toMatchObject([
+      { supplierName: 'Fennbridge Fittings', lines: [{ quantity: 100, unitPrice: '0.17' }] },
+      {
+        supplierName: 'Oldbeck Tannery',
+        lines: [{ areaMm2: '2043866.88', unitPrice: '9.50' }],
+      },
+    ]);
+    expect(notes).toEqual([]);
+    const { short } = await check();
+    expect(short.map(({ supplierName }) => supplierName)).toEqual([
+      'Oldbeck Tannery',
+      'Fennbridge Fittings',
+    ]);
+  });
+
+  it('is still ordered from where no price was known, and the notes say so', async () => {
+    await offeredForLess('0', '0');
+    const { orders, notes } = await draft();
+    expect(orders).toMatchObject([
+      { supplierName: 'Fennbridge Fittings', lines: [{ quantity: 100, unitPrice: '0.00' }] },
+      { supplierName: 'Oldbeck Tannery', lines: [{ unitPrice: '0.00' }] },
+    ]);
+    expect(notes).toEqual(
+      ['Oak tan 5–6 oz', 'Rivet 9 mm'].map(
+        (name) =>
+          `${name} is drafted at 0.00, as its price is not known. Ask for it before you send the order.`,
+      ),
+    );
+  });
 });
 
 it('says the same day as what to order', async () => {

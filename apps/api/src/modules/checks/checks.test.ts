@@ -329,7 +329,9 @@ describe('drafting what is short', () => {
     });
     const again = await draft(runs);
     expect(again.orders).toEqual([]);
-    expect(again.notes).toContain(`Rivet 9 mm is on draft ${rivets?.number} already: send it.`);
+    expect(again.notes).toContain(
+      `Rivet 9 mm is on draft ${rivets?.number}, which you still have to send.`,
+    );
     expect(rivetsOf(await check(runs), 0)?.sentence).toContain(
       `${rivets?.number} is drafted for it and still to be sent.`,
     );

@@ -224,6 +224,49 @@ describe('a point and a quantity set by hand', () => {
     });
   });
 
+  it.each([
+    ['at what was paid', '0.17', '9', ['0.17', '9.00']],
+    ['at 0.00 where no price was known', '0', '0', ['0.00', '0.00']],
+  ])(
+    'are ordered from whom it was bought before somebody else made an offer, %s',
+    async (_what, unitPrice, pricePerFt2, drafted) => {
+      const { supplierId, hardwareId, leatherId } = things;
+      await change('hardware', hardwareId, { supplierId, unitPrice });
+      await change('leathers', leatherId, {
+        pricePerFt2,
+        wholeForm: 'side',
+        wholeAreaMm2: ft2(22),
+      });
+      const other = await stockUp(shop);
+      const first = { supplierId: other.supplierId, breaks: [{ from: '0', price: '0.01' }] };
+      await owner()
+        .post('/api/supplier-offers')
+        .send({ hardwareId, ...first })
+        .expect(201);
+      await owner()
+        .post('/api/supplier-offers')
+        .send({ leatherId, ...first })
+        .expect(201);
+      await set({ point: '700', quantity: '850' });
+      const side = await leather();
+      await owner()
+        .patch(`/api/order-suggestions/leather/${leatherId}`)
+        .set('If-Match', `"${side.version}"`)
+        .send({ point: ft2(10), quantity: ft2(30) })
+        .expect(200);
+      const items = [await rivets(), await leather()];
+      expect(items).toMatchObject([
+        { supplierId, quantity: '900', usualBy: 'hand' },
+        { supplierId, quantity: ft2(44), usualBy: 'hand' },
+      ]);
+      const { body } = await draft(items.map((item) => lineFor(item))).expect(201);
+      const [order, ...others] = (body as { orders: PurchaseOrder[] }).orders;
+      expect(others).toEqual([]);
+      expect(order?.lines.map((line) => line.unitPrice)).toEqual(drafted);
+      expect(body.notes).toHaveLength(unitPrice === '0' ? 2 : 0);
+    },
+  );
+
   it('refuse parts of a piece, nothing at a time, and what somebody changed meanwhile', async () => {
     expect((await set({ quantity: '1.5' })).body.errors[0].field).toBe('quantity');
     expect((await set({ quantity: '0' })).status).toBe(422);
@@ -270,8 +313,10 @@ describe('drafting', () => {
     const few = await draft([lineFor(await rivets(), { quantity: '7' })]).expect(201);
     expect(few.body.orders[0].lines).toMatchObject([{ quantity: 100 }]);
     expect(few.body.notes[0]).toMatch(/: 100 is drafted, for it is sold 100 at a time\.$/);
+    const any = await draft([lineFor(await leather(), { quantity: ft2(12) })]).expect(201);
+    expect(any.body.notes).toEqual([]);
     await change('leathers', things.leatherId, { wholeForm: 'side', wholeAreaMm2: ft2(22) });
-    const part = await draft([lineFor(await leather(), { quantity: ft2(30) })]).expect(201);
+    const part = await draft([lineFor(await leather(), { quantity: ft2(18) })]).expect(201);
     expect(part.body.orders[0].lines[1]).toMatchObject({ areaMm2: ft2(30) });
     expect(part.body.notes[0]).toContain(
       '30 ft² is drafted, as typed, but it is sold 22 ft² at a time.',
@@ -291,6 +336,34 @@ describe('drafting', () => {
       .expect(201);
     const { body } = await draft([lineFor(await rivets(), { quantity: '1000' })]).expect(201);
     expect(body.orders[0].lines).toMatchObject([{ quantity: 1000, unitPrice: '0.12' }]);
+  });
+
+  describe('of a thing without a price', () => {
+    const unknown = /is drafted at 0\.00, as its price is not known\. Ask for it before you send/;
+    beforeEach(async () => {
+      await sold();
+      await change('hardware', things.hardwareId, { unitPrice: '0' });
+      await change('leathers', things.leatherId, { pricePerFt2: '0' });
+    });
+
+    it('says so, of hardware and of leather', async () => {
+      const rivet = await draft([lineFor(await rivets())]).expect(201);
+      expect(rivet.body.orders[0].lines).toMatchObject([{ unitPrice: '0.00' }]);
+      expect(rivet.body.notes).toEqual([expect.stringMatching(unknown)]);
+      const side = await draft([lineFor(await leather(), { quantity: ft2(22) })]).expect(201);
+      expect(side.body.notes).toEqual([expect.stringMatching(unknown)]);
+    });
+
+    it('says no more of it once a price is typed on the draft', async () => {
+      const { supplierId, hardwareId } = things;
+      const line = { of: 'hardware', hardwareId, quantity: 500, unitPrice: '0.15' };
+      const body = { supplierId, lines: [line] };
+      await owner().post('/api/purchase-orders').send(body).expect(201);
+      const { body: more } = await draft([lineFor(await rivets(), { quantity: '200' })]).expect(
+        201,
+      );
+      expect(more.notes).not.toContainEqual(expect.stringMatching(unknown));
+    });
   });
 
   it('says what to do where nobody is named who sells it', async () => {

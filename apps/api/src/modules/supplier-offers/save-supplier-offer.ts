@@ -1,5 +1,5 @@
 import type { addSupplierOffer, BodyOf, changeSupplierOffer } from '@hidewright/contract';
-import { checkOffer } from '@hidewright/domain';
+import { checkOffer, isPriceKnown } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { assignDefined } from '../../db/assign-defined.ts';
 import { scaled, unscaled } from '../../db/columns/scaled-decimal.ts';
@@ -35,10 +35,12 @@ export async function addOffer(
   await requireSupplier(work, supplierId, thing);
   const first = (await work.em.count(SupplierOffer, thing)) === 0;
   const present = await presentOf(work, thing);
-  const elsewhere = present.supplierId !== null && present.supplierId !== supplierId;
+  const elsewhere = present !== null && present.supplierId !== supplierId;
   if (first && elsewhere) {
     const theirs = await keepPresentOffer(work, thing, present);
-    if (theirs !== null) await logOffer(work, theirs, 'kept what is paid today as the offer for');
+    const known = isPriceKnown(present.price.toFixed());
+    const what = known ? 'what is paid today as the offer' : 'an offer without a price';
+    await logOffer(work, theirs, `kept ${what} for`);
   }
   const offer = work.em.create(SupplierOffer, {
     ...plain,
@@ -93,7 +95,10 @@ export async function removeOffer(work: Work, offer: SupplierOffer): Promise<voi
   await preferAnother(work, offer);
 }
 
-/** Where none for the same thing is preferred, the least dear of the others is: somebody sells it still. */
+/**
+ * Where none for the same thing is preferred, the least dear of the others is, one without a price last: somebody sells
+ * it still.
+ */
 async function preferAnother(work: Work, { id, ...offer }: SupplierOffer): Promise<void> {
   const { leatherId, hardwareId } = offer;
   const all = await work.em.find(
@@ -110,7 +115,9 @@ async function preferAnother(work: Work, { id, ...offer }: SupplierOffer): Promi
   await logOffer(work, next, 'prefers from now on the offer for');
 }
 
-const firstPrice = ({ breaks }: SupplierOffer) => new Decimal(breaks[0]?.price ?? 0);
+function firstPrice({ breaks: [first] }: SupplierOffer): Decimal {
+  return new Decimal(first !== undefined && isPriceKnown(first.price) ? first.price : Infinity);
+}
 
 /** The prices of an offer as they are kept. @throws {InvalidInput} naming the line that is wrong */
 function requireSound({ leatherId, minimum, multiple, breaks }: SupplierOffer): void {

@@ -93,6 +93,74 @@ describe('offers of suppliers', () => {
     expect(item).toMatchObject({ supplierId, multiple: '2043866.88' });
   });
 
+  describe('keep the supplier whom a thing names without a price', () => {
+    const named = (kind: 'leathers' | 'hardware') =>
+      kind === 'leathers' ? { pricePerFt2: '0' } : { unitPrice: '0', packSize: 25 };
+    async function withFirstOffer(kind: 'leathers' | 'hardware', name: string) {
+      const { supplierId } = things;
+      const { body } = await owner()
+        .post(`/api/${kind}`)
+        .send({ name, supplierId, ...named(kind) })
+        .expect(201);
+      const thing = kind === 'leathers' ? { leatherId: body.id } : { hardwareId: body.id };
+      const first = [{ from: kind === 'leathers' ? '0' : '1', price: '0.5' }];
+      const { body: other } = await offer({ supplierId: second, ...thing, breaks: first });
+      const [[key, id]] = Object.entries(thing) as [[string, number]];
+      const { body: list } = await owner().get(`/api/supplier-offers?${key}=${id}`).expect(200);
+      return { id, other, kept: list.items[0], items: list.items };
+    }
+
+    it.each([
+      ['leathers', '0', null],
+      ['hardware', '25', '25'],
+    ] as const)(
+      'of %s, preferred beside the first offer of somebody else',
+      async (kind, from, multiple) => {
+        const { supplierId } = things;
+        const { id, items } = await withFirstOffer(kind, `No price yet, ${kind}`);
+        expect(items).toMatchObject([
+          { supplierId, preferred: true, multiple, breaks: [{ from, price: '0' }] },
+          { supplierId: second, preferred: false },
+        ]);
+        const of = kind === 'leathers' ? 'leather' : 'hardware';
+        const { body: due } = await owner().get('/api/order-suggestions?show=all').expect(200);
+        const item = due.items.find(
+          (each: { id: number; of: string }) => each.of === of && each.id === id,
+        );
+        expect(item).toMatchObject({ supplierId, unitPrice: '0.00' });
+        const { body: log } = await owner().get('/api/activities?limit=2').expect(200);
+        expect(log.items[1].action).toMatch(/^kept an offer without a price for No price yet, /);
+      },
+    );
+
+    it('as an offer that quotes cannot reckon with before its price is entered', async () => {
+      const { id, kept } = await withFirstOffer('hardware', 'Ring without a price');
+      const adopt = () => owner().post(`/api/supplier-offers/${kept.id}/adoptions`);
+      const refused = await adopt().expect(409);
+      expect(refused.body.detail).toBe(
+        'No price of theirs is known. Enter it with their offer, then use it.',
+      );
+      await owner()
+        .patch(`/api/supplier-offers/${kept.id}`)
+        .set('If-Match', `"${kept.version}"`)
+        .send({ breaks: [{ from: '25', price: '0.4' }] })
+        .expect(200);
+      await adopt().expect(200);
+      const { body } = await owner().get(`/api/hardware/${id}`).expect(200);
+      expect(body).toMatchObject({ unitPrice: '0.40', supplierId: things.supplierId });
+    });
+
+    it('as one that is not the least dear of those that are left', async () => {
+      const { id, other, kept } = await withFirstOffer('hardware', 'Stud without a price');
+      const third = await owner().post('/api/suppliers').send({ name: 'Brindle Brass' });
+      const last = { supplierId: third.body.id, hardwareId: id, preferred: true };
+      const { body: dear } = await offer({ ...last, breaks: [{ from: '1', price: '0.9' }] });
+      await owner().delete(`/api/supplier-offers/${dear.id}`).expect(200);
+      const { body } = await owner().get(`/api/supplier-offers?hardwareId=${id}`).expect(200);
+      expect(body.items.map((each: { id: number }) => each.id)).toEqual([other.id, kept.id]);
+    });
+  });
+
   it('keep an area of leather exactly, and its price per ft²', async () => {
     const { supplierId, leatherId } = things;
     const { body } = await offer({

@@ -1,4 +1,6 @@
+import { startWeekMix } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
+import { opensFor } from '../guard.ts';
 
 const numberOf = (data: unknown) => (data as { number: string }).number;
 
@@ -11,6 +13,7 @@ export const benchRoutes: RouteObject[] = [
       {
         path: 'week-mix',
         handle: { crumb: 'A week’s mix' },
+        middleware: [opensFor(startWeekMix)],
         lazy: () => import('./bench/week-mix.tsx'),
       },
       { path: 'jobs/:id', handle: { crumb: numberOf }, lazy: () => import('./bench/job.tsx') },

@@ -1,4 +1,4 @@
-import { addCustomer, createQuote, changeQuote } from '@hidewright/contract';
+import { addCustomer, createQuote, changeQuote, listCustomers } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
 import { opensFor } from '../guard.ts';
 
@@ -47,6 +47,7 @@ export const counterRoutes: RouteObject[] = [
       {
         path: 'customers',
         handle: { crumb: 'Customers' },
+        middleware: [opensFor(listCustomers)],
         children: [
           { index: true, lazy: () => import('./counter/customers.tsx') },
           {

@@ -1,4 +1,4 @@
-import { addPattern, addTool, changePattern } from '@hidewright/contract';
+import { addPattern, addTool, changePattern, readToolingAdvice } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
 import { opensFor } from '../guard.ts';
 
@@ -44,6 +44,7 @@ export const patternRoomRoutes: RouteObject[] = [
           {
             path: ':id/tooling',
             handle: { crumb: nameOf },
+            middleware: [opensFor(readToolingAdvice)],
             lazy: () => import('./pattern-room/tooling-for.tsx'),
           },
           {

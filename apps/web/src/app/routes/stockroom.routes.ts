@@ -4,6 +4,9 @@ import {
   addPurchaseOrder,
   addSupplier,
   changePurchaseOrder,
+  listOrderSuggestions,
+  putOnShelf,
+  receiveDelivery,
   sellFinished,
 } from '@hidewright/contract';
 import type { RouteObject } from 'react-router-dom';
@@ -34,6 +37,7 @@ export const stockroomRoutes: RouteObject[] = [
       {
         path: 'to-order',
         handle: { crumb: 'To order' },
+        middleware: [opensFor(listOrderSuggestions)],
         lazy: () => import('./stockroom/to-order.tsx'),
       },
       {
@@ -61,6 +65,7 @@ export const stockroomRoutes: RouteObject[] = [
       {
         path: 'receive',
         handle: { crumb: 'Receive' },
+        middleware: [opensFor(receiveDelivery)],
         lazy: () => import('./stockroom/receive.tsx'),
       },
       {
@@ -116,6 +121,7 @@ export const stockroomRoutes: RouteObject[] = [
           {
             path: 'new',
             handle: { crumb: 'Put on the shelf' },
+            middleware: [opensFor(putOnShelf)],
             lazy: () => import('./stockroom/put-on-shelf.tsx'),
           },
           {

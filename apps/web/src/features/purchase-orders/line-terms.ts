@@ -1,5 +1,6 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
 import {
+  isPriceKnown,
   judgeQuantity,
   MM2_PER_FT2,
   priceReached,
@@ -49,7 +50,28 @@ export function priceToFill({ typed, before, offered }: PriceField): string | un
   return ours && !sameFigure(typed, offered) ? offered : undefined;
 }
 
-/** What is said of a line: what is not sold like that, and where more costs less or little more. */
+interface TypedLine {
+  /** How much of it. */
+  much: unknown;
+  price: string;
+}
+
+/** What is said of a line: how the supplier sells it, as far as that is known, and where it has no price. */
+export function lineText(
+  terms: LineTerms | undefined,
+  { much, price }: TypedLine,
+  habit: Habit,
+): string {
+  const unpriced = isFigure(price) && !isPriceKnown(price);
+  return [
+    terms && termsText(terms, much, price, habit),
+    unpriced && 'Its price is not known: ask for it, or the order goes out at 0.00.',
+  ]
+    .filter(Boolean)
+    .join(' ');
+}
+
+/** What is not sold like that, and where more costs less or little more. */
 export function termsText(terms: LineTerms, typed: unknown, price: string, habit: Habit): string {
   const quantity = quantityIn(typed);
   if (quantity === undefined) return '';

@@ -33,3 +33,15 @@ it('names the lines that are not sold like that, and those of which more costs l
     },
   ]);
 });
+
+it('names the lines without a price, whether or not an offer was entered', () => {
+  const unpriced = [line(1, 7, 300), line(2, 6, 20)].map((each) => ({
+    ...each,
+    unitPrice: '0.00',
+  }));
+  const text = 'Its price is not known: ask for it, or the order goes out at 0.00.';
+  expect(orderRemarks({ lines: unpriced }, [offer(7)], { areaUnit: 'ft2' })).toEqual([
+    { lineId: 1, name: 'Rivets 7', text },
+    { lineId: 2, name: 'Rivets 6', text },
+  ]);
+});

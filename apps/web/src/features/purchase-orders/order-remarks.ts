@@ -1,6 +1,6 @@
 import type { PurchaseOrder, SupplierOfferReply } from '@hidewright/contract';
 import type { Workshop } from '../../lib/workshop.tsx';
-import { termsOf, termsText } from './line-terms.ts';
+import { lineText, termsOf } from './line-terms.ts';
 
 interface LineRemark {
   lineId: number;
@@ -8,7 +8,7 @@ interface LineRemark {
   text: string;
 }
 
-/** What the supplier's offers say to the lines of an order, for whoever is about to send it. */
+/** What is to be said of the lines of an order, for whoever is about to send it. */
 export function orderRemarks(
   { lines }: Pick<PurchaseOrder, 'lines'>,
   offers: readonly SupplierOfferReply[],
@@ -18,7 +18,7 @@ export function orderRemarks(
     ({ id, name, of, leatherId, hardwareId, areaMm2, quantity, unitPrice = '' }) => {
       if (of === 'service') return [];
       const terms = termsOf(offers, of, leatherId ?? hardwareId);
-      const text = terms && termsText(terms, areaMm2 ?? quantity, unitPrice, habit);
+      const text = lineText(terms, { much: areaMm2 ?? quantity, price: unitPrice }, habit);
       return text ? [{ lineId: id, name, text }] : [];
     },
   );

@@ -3,7 +3,6 @@ import {
   listLots,
   listPurchaseOrders,
   listReceipts,
-  listSupplierOffers,
   listSupplierReturns,
   readPurchaseOrder,
   type PurchaseOrderState,
@@ -39,16 +38,6 @@ export function awaitedOrdersQuery() {
       everyPage((paging) =>
         call(listPurchaseOrders, { query: { awaited: 'yes', ...paging }, signal }),
       ),
-  });
-}
-
-/** All that a supplier sells, as far as it was entered. */
-export function soldByQuery(supplierId: number) {
-  return queryOptions({
-    queryKey: ['purchase-orders', 'sold-by', supplierId],
-    queryFn: ({ signal }) =>
-      everyPage((paging) => call(listSupplierOffers, { query: { supplierId, ...paging }, signal })),
-    enabled: supplierId > 0,
   });
 }
 

@@ -1,6 +1,7 @@
+import type { SupplierOfferReply } from '@hidewright/contract';
 import { bestBuy } from '@hidewright/domain';
 import { expect, it } from 'vitest';
-import { buyMoreText, neededFault } from './offer-words.ts';
+import { buyMoreText, leftOutText, neededFault } from './offer-words.ts';
 
 const workshop = { areaUnit: 'ft2' } as Parameters<typeof buyMoreText>[2];
 const offer = {
@@ -34,4 +35,14 @@ it.each([
 it('says what is wrong with an area', () => {
   expect(neededFault('abc', 'mm2', 'ft2')).toMatch(/^Enter the area in ft²/);
   expect(neededFault('0', 'mm2', 'ft2')).toBe('Enter how much is needed, above 0.');
+});
+
+it('names those whose price is not known, and does not compare them', () => {
+  const by = (supplierName: string, price: string) =>
+    ({ supplierName, breaks: [{ from: '1', price }] }) as SupplierOfferReply;
+  const [dear, unknown] = [by('Oldbeck Tannery', '0.2'), by('Fennbridge Fittings', '0')];
+  expect(leftOutText([dear, unknown])).toBe(
+    'Without Fennbridge Fittings: ask what it costs there, and enter it.',
+  );
+  expect(leftOutText([dear])).toBe('');
 });

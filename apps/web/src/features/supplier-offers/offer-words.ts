@@ -1,5 +1,5 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
-import type { OfferedBuy } from '@hidewright/domain';
+import { isPriceKnown, type OfferedBuy } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { areaText, countText, moneyText } from '../../lib/formatting.ts';
 import { areaExamples, areaUnits, readArea } from '../../lib/units.ts';
@@ -36,6 +36,18 @@ export function soldText(offer: SupplierOfferReply, workshop: Workshop): string 
   ]
     .filter(Boolean)
     .join(', ');
+}
+
+/** Whether it is known what the supplier asks; the maker is not told. */
+export function hasPrice({ breaks: [first] = [] }: Pick<SupplierOfferReply, 'breaks'>): boolean {
+  return first !== undefined && isPriceKnown(first.price);
+}
+
+/** Who is not among those that are compared, and what to do about it. */
+export function leftOutText(offers: readonly SupplierOfferReply[]): string {
+  const names = offers.filter((offer) => !hasPrice(offer)).map(({ supplierName }) => supplierName);
+  if (names.length === 0) return '';
+  return `Without ${names.join(' and ')}: ask what it costs there, and enter it.`;
 }
 
 /** 36 more pieces cost 1.20 less; nothing where buying more than is needed does not pay. */

@@ -5,6 +5,7 @@ import {
   heldNote,
   leadWords,
   methodWords,
+  priceWords,
   soldWords,
   wholeWords,
 } from './to-order-words.ts';
@@ -46,6 +47,16 @@ it('says how it is sold, and how many sides that is', () => {
   expect(wholeWords('6131600.64', { whole: belly } as never)).toBe('3 bellies');
   expect(wholeWords('6131600.64', { whole: side })).toBe('3 sides');
   expect(wholeWords('2043866.88', { whole: side })).toBe('1 side');
+});
+
+it('says what an order would cost, or that nobody knows', () => {
+  const words = (price: object) => priceWords(item(price), { currency: 'USD' });
+  expect(words({ amount: '85.00', unitPrice: '0.17' })).toBe('85.00 USD, 0.17 each');
+  expect(words({ of: 'leather', amount: '1200.00', unitPrice: '6.00' })).toBe(
+    '1,200.00 USD, 6.00 a ft²',
+  );
+  expect(words({ amount: '0.00', unitPrice: '0.00' })).toBe('price not known');
+  expect(words({})).toBe('');
 });
 
 it('says by which method use is expected, and why', () => {

@@ -1,7 +1,13 @@
 import type { OrderSuggestionReply } from '@hidewright/contract';
-import { unitWord, wholes } from '@hidewright/domain';
+import { isPriceKnown, unitWord, wholes } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
-import { countText, numberText, rackAreaText } from '../../lib/formatting.ts';
+import {
+  countText,
+  moneyText,
+  numberText,
+  rackAreaText,
+  unitPriceText,
+} from '../../lib/formatting.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
 type Item = OrderSuggestionReply;
@@ -47,6 +53,17 @@ export function wholeWords(quantity: string, { whole }: Pick<Item, 'whole'>): st
   if (whole === null) return '';
   const count = new Decimal(quantity).div(whole.areaMm2).toDecimalPlaces(1).toNumber();
   return `${count} ${wholes({ count, form: whole.form })}`;
+}
+
+/** 85.00 USD, 0.17 each; nothing for those who may not see prices. */
+export function priceWords(
+  { of, amount, unitPrice }: Pick<Item, 'of' | 'amount' | 'unitPrice'>,
+  { currency }: Pick<Workshop, 'currency'>,
+): string {
+  if (amount === undefined || unitPrice === undefined) return '';
+  if (!isPriceKnown(unitPrice)) return 'price not known';
+  const each = of === 'leather' ? 'a ft²' : 'each';
+  return `${moneyText(amount)} ${currency}, ${unitPriceText(unitPrice)} ${each}`;
 }
 
 export const periodWord = ({ usage }: Pick<Item, 'usage'>): string =>

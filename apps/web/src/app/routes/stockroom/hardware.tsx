@@ -18,7 +18,7 @@ import { hardwareQuery } from '../../../features/hardware/hardware.queries.ts';
 import { MovementsTable } from '../../../features/stock/components/movements-table.tsx';
 import { heldQuery, movementsQuery } from '../../../features/stock/stock.queries.ts';
 import { OffersCard } from '../../../features/supplier-offers/components/offers-card.tsx';
-import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { choicesOf } from './choices.ts';

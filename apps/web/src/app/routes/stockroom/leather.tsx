@@ -15,9 +15,9 @@ import { leatherQuery } from '../../../features/leathers/leathers.queries.ts';
 import { LotsTable } from '../../../features/lots/components/lots-table.tsx';
 import { lotsQuery } from '../../../features/lots/lots.queries.ts';
 import { OffersCard } from '../../../features/supplier-offers/components/offers-card.tsx';
-import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { suppliersQuery } from '../../../features/suppliers/suppliers.queries.ts';
-import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
+import { askedPriceText, rackAreaText } from '../../../lib/formatting.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -74,6 +74,7 @@ export function Component() {
           aside={<TextLink to={`/stockroom/ledger?leather=${id}`}>What moved of it</TextLink>}
         >
           <LotsTable
+            ofOneLeather
             rows={lots.data?.pages.flatMap((page) => page.items) ?? []}
             empty={
               <EmptyState title="None of it is on the rack." action={receive}>
@@ -105,7 +106,7 @@ function Facts({ leather }: { leather: Leather }) {
   const { pricePerFt2, supplierName } = leather;
   const price = pricePerFt2 !== undefined && {
     word: `Price, ${currency} per ${areaUnits[areaUnit].sign}`,
-    figure: areaPriceText(pricePerFt2, areaUnit),
+    figure: askedPriceText(pricePerFt2, areaUnit),
     note: supplierName ?? undefined,
   };
   return (

@@ -43,7 +43,6 @@ export async function loader({ request }: LoaderFunctionArgs) {
 export function Component() {
   const loaded = useLoaderData<PurchaseOrder | null>();
   const [search] = useSearchParams();
-  const { handlesStock } = useRole();
   const { data: order = loaded } = useQuery({
     ...purchaseOrderQuery(loaded?.id ?? 0),
     enabled: loaded !== null,
@@ -54,11 +53,11 @@ export function Component() {
   return (
     <>
       <PageHeader title={title} subtitle={order?.supplierName} />
-      {!handlesStock && <EmptyState title="The owner and the maker receive deliveries." />}
-      {handlesStock && saysWhat(search) && (
+      {saysWhat(search) ? (
         <Receiving key={String(search)} asked={order} onReceived={setReceived} />
+      ) : (
+        <Choosing />
       )}
-      {handlesStock && !saysWhat(search) && <Choosing />}
     </>
   );
 }

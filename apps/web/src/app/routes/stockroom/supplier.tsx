@@ -10,7 +10,7 @@ import { ShowEarlier } from '../../../components/show-earlier.tsx';
 import { PurchaseOrdersTable } from '../../../features/purchase-orders/components/purchase-orders-table.tsx';
 import { purchaseOrdersQuery } from '../../../features/purchase-orders/purchase-orders.queries.ts';
 import { SoldList } from '../../../features/supplier-offers/components/sold-list.tsx';
-import { supplierOffersQuery } from '../../../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { ChangeSupplierForm } from '../../../features/suppliers/components/change-supplier-form.tsx';
 import { SupplierFacts } from '../../../features/suppliers/components/supplier-facts.tsx';
 import { supplierQuery } from '../../../features/suppliers/suppliers.queries.ts';
@@ -52,6 +52,7 @@ export function Component() {
           <SoldList supplierId={id} />
           <Card title="Orders to them">
             <PurchaseOrdersTable
+              toOneSupplier
               rows={orders.data?.pages.flatMap((page) => page.items) ?? []}
               empty={<EmptyState title="Nothing was ordered from them yet." action={order} />}
               after={<ShowEarlier pages={orders} what="orders" />}

@@ -1,10 +1,7 @@
 import { usualOffer } from '@hidewright/domain';
 import { hardwareQuery } from '../../../features/hardware/hardware.queries.ts';
 import { leatherQuery } from '../../../features/leathers/leathers.queries.ts';
-import {
-  supplierOffersQuery,
-  type OfferedThing,
-} from '../../../features/supplier-offers/supplier-offers.queries.ts';
+import { supplierOffersQuery, type OfferedThing } from '../../../lib/supplier-offers.queries.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 
 /** Who a leather or a hardware is usually bought from, as what to order has it; null where nobody is named. */

@@ -1,7 +1,7 @@
 import { countedWords, unitWord } from '@hidewright/domain';
 import type { Hardware } from '@hidewright/contract';
 import { KeyFigures } from '../../../components/key-figures.tsx';
-import { lengthText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { lengthText, moneyText, askedPriceText } from '../../../lib/formatting.ts';
 import { lengthFigure } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
@@ -39,11 +39,12 @@ function Buying({ hardware, isKit }: { hardware: Hardware; isKit: boolean }) {
     },
   ];
   const prices = [
-    unitPrice !== undefined && {
-      word: `Price, ${currency}${unit === 'piece' ? '' : ` per ${unitWord(unit)}`}`,
-      figure: unitPriceText(unitPrice),
-      note: isKit && priceFromParts ? 'what its parts cost' : undefined,
-    },
+    unitPrice !== undefined &&
+      !fromCustomer && {
+        word: `Price, ${currency}${unit === 'piece' ? '' : ` per ${unitWord(unit)}`}`,
+        figure: askedPriceText(unitPrice),
+        note: isKit && priceFromParts ? 'what its parts cost' : undefined,
+      },
     valueOnHand !== undefined &&
       !isKit && { word: `On hand at cost, ${currency}`, figure: moneyText(valueOnHand) },
   ].filter((each) => each !== false);

@@ -6,7 +6,7 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { StateMark } from '../../../components/state-mark.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { countText, moneyText, askedPriceText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 
 const counted = (
@@ -27,14 +27,16 @@ function pricesIn(currency: string): Column<Hardware>[] {
       id: 'price',
       header: `Price, ${currency}`,
       value: (row) => row.unitPrice,
-      cell: (row) => row.unitPrice !== undefined && unitPriceText(row.unitPrice),
+      cell: ({ unitPrice, fromCustomer }) =>
+        unitPrice !== undefined && !fromCustomer && askedPriceText(unitPrice),
       align: 'right',
     },
     {
       id: 'value',
       header: `On hand at cost, ${currency}`,
       value: (row) => row.valueOnHand,
-      cell: (row) => row.valueOnHand !== undefined && moneyText(row.valueOnHand),
+      cell: ({ valueOnHand, parts }) =>
+        parts.length > 0 ? 'in its parts' : valueOnHand !== undefined && moneyText(valueOnHand),
       align: 'right',
       total: (rows) =>
         moneyText(Decimal.sum(0, ...rows.map((row) => row.valueOnHand ?? '0')).toFixed()),
@@ -51,7 +53,7 @@ const basics: Column<Hardware>[] = [
       <span className="inline-flex flex-wrap items-baseline gap-x-3">
         <TextLink to={`/stockroom/hardware/${row.id}`}>{row.name}</TextLink>
         {row.unit !== 'piece' && (
-          <span className="text-sm text-ink-soft">in {unitWord(row.unit, 2)}</span>
+          <span className="text-sm font-normal text-ink-soft">in {unitWord(row.unit, 2)}</span>
         )}
         {row.short && <StateMark state="short" />}
         <KitRemark row={row} />
@@ -59,7 +61,13 @@ const basics: Column<Hardware>[] = [
     ),
     onPhone: 'title',
   },
-  { id: 'kind', header: 'Kind', value: (row) => row.kind, onPhone: 'hidden' },
+  {
+    id: 'kind',
+    header: 'Kind',
+    value: (row) => row.kind,
+    cell: (row) => <span className="whitespace-nowrap">{row.kind}</span>,
+    onPhone: 'hidden',
+  },
   counted('onHand', 'On hand', (row) => row.onHand),
   counted('reserved', 'Held for jobs', (row) => row.reserved),
   counted('free', 'Free', (row) => row.free),
@@ -72,7 +80,8 @@ function KitRemark({ row: { parts, partOf } }: { row: Hardware }) {
     parts.length > 0
       ? `${kitWords(parts)}; as many as they make up`
       : partOf.length > 0 && `a part of ${partOf.map(({ name }) => name).join(' and ')}`;
-  return words && <span className="basis-full text-sm text-ink-soft">{words}</span>;
+  if (words === false) return null;
+  return <span className="basis-full text-left text-sm font-normal text-ink-soft">{words}</span>;
 }
 
 interface HardwareTableProps {

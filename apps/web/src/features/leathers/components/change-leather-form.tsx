@@ -30,6 +30,7 @@ export function ChangeLeatherForm({ leather, suppliers }: ChangeLeatherFormProps
       schema={changeLeather.body}
       defaults={typedOf(leather)}
       submitWord="Save"
+      submitTone="secondary"
       draftKey={`leather-${leather.id}`}
       onReload={reload}
       onSend={async (body) => {

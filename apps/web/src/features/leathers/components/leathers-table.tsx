@@ -3,7 +3,7 @@ import { useMemo, type ReactNode } from 'react';
 import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaPriceText, rackAreaText } from '../../../lib/formatting.ts';
+import { askedPriceText, rackAreaText } from '../../../lib/formatting.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { weightText } from '../../../lib/weight-words.ts';
@@ -15,7 +15,7 @@ function columnsFor(workshop: Workshop, withPrices: boolean): Column<Leather>[] 
     id: 'price',
     header: `Price, ${currency} per ${areaUnits[areaUnit].sign}`,
     value: (row) => row.pricePerFt2,
-    cell: (row) => row.pricePerFt2 !== undefined && areaPriceText(row.pricePerFt2, areaUnit),
+    cell: (row) => row.pricePerFt2 !== undefined && askedPriceText(row.pricePerFt2, areaUnit),
     align: 'right',
   };
   return [

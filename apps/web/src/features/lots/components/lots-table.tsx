@@ -22,7 +22,12 @@ function OnHand({ lot, area }: { lot: Lot; area: (areaMm2: string) => string }) 
   );
 }
 
-function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
+interface Shown {
+  leather: boolean;
+  values: boolean;
+}
+
+function columnsFor(workshop: Workshop, shown: Shown): Column<Lot>[] {
   const { lengthUnit, currency, today } = workshop;
   const area = (areaMm2: string) => rackAreaText(areaMm2, workshop);
   const value: Column<Lot> = {
@@ -33,6 +38,11 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
     align: 'right',
     total: (rows) => moneyText(sumOf(rows.map((row) => row.valueOnHand ?? '0'))),
   };
+  const leather: Column<Lot> = {
+    id: 'leather',
+    header: 'Leather',
+    value: (row) => row.leatherName,
+  };
   return [
     {
       id: 'tag',
@@ -41,7 +51,7 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
       cell: (row) => <TextLink to={`/stockroom/lots/${row.id}`}>{row.tag}</TextLink>,
       onPhone: 'title',
     },
-    { id: 'leather', header: 'Leather', value: (row) => row.leatherName },
+    ...(shown.leather ? [leather] : []),
     { id: 'form', header: 'Form', value: (row) => formText(row, lengthUnit) },
     { id: 'place', header: 'Place', value: (row) => row.place },
     {
@@ -68,7 +78,7 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
       align: 'right',
       total: (rows) => area(sumOf(rows.map((row) => row.freeAreaMm2))),
     },
-    ...(withValues ? [value] : []),
+    ...(shown.values ? [value] : []),
     {
       id: 'received',
       header: 'Received',
@@ -81,15 +91,20 @@ function columnsFor(workshop: Workshop, withValues: boolean): Column<Lot>[] {
 
 interface LotsTableProps {
   rows: readonly Lot[];
+  /** They are all of the leather whose page it is. */
+  ofOneLeather?: boolean;
   empty: ReactNode;
   /** Under the last row, such as a button for more. */
   after?: ReactNode;
 }
 
-export function LotsTable({ rows, empty, after }: LotsTableProps) {
+export function LotsTable({ rows, ofOneLeather = false, empty, after }: LotsTableProps) {
   const workshop = useWorkshop();
-  const withValues = rows.some((row) => row.valueOnHand !== undefined);
-  const columns = useMemo(() => columnsFor(workshop, withValues), [workshop, withValues]);
+  const values = rows.some((row) => row.valueOnHand !== undefined);
+  const columns = useMemo(
+    () => columnsFor(workshop, { leather: !ofOneLeather, values }),
+    [workshop, ofOneLeather, values],
+  );
   return (
     <DataTable
       label="Lots"

@@ -7,7 +7,7 @@ import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { offeredPrice, termsOf, termsText, type LineTerms } from '../line-terms.ts';
+import { lineText, offeredPrice, termsOf, type LineTerms } from '../line-terms.ts';
 import type { Goods } from '../typed-order.ts';
 import { useOfferedPrice } from '../use-offered-price.ts';
 
@@ -69,7 +69,7 @@ export function OrderLine({ at, of, goods, offers, onRemove }: OrderLineProps) {
         <X size={18} aria-hidden="true" />
       </button>
       <p role="status" className="basis-full text-sm text-ink-soft empty:hidden">
-        {terms && <TermsRemark terms={terms} much={much} price={`${line}.unitPrice`} />}
+        {chosen && <LineRemark terms={terms} much={much} price={`${line}.unitPrice`} />}
       </p>
     </div>
   );
@@ -96,8 +96,15 @@ function useChosen(
   return { chosen, terms };
 }
 
-function TermsRemark({ terms, much, price }: { terms: LineTerms; much: string; price: string }) {
+interface LineRemarkProps {
+  terms: LineTerms | undefined;
+  /** The fields with the quantity and the price. */
+  much: string;
+  price: string;
+}
+
+function LineRemark({ terms, much, price }: LineRemarkProps) {
   const workshop = useWorkshop();
   const [quantity, typed] = useWatch({ name: [much, price] }) as unknown[];
-  return termsText(terms, quantity, String(typed ?? ''), workshop);
+  return lineText(terms, { much: quantity, price: String(typed ?? '') }, workshop);
 }

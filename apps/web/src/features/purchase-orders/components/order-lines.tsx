@@ -5,8 +5,8 @@ import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { useCheckOnLeaving } from '../../../components/use-check-on-leaving.ts';
 import { moneyText } from '../../../lib/formatting.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { soldByQuery } from '../purchase-orders.queries.ts';
 import { amountOf, blankLine, blankService, type Goods, type TypedLine } from '../typed-order.ts';
 import { useFreeLots } from '../use-free-lots.ts';
 import { OrderLine } from './order-line.tsx';
@@ -86,6 +86,9 @@ function Together({ amount }: { amount: string | undefined }) {
 /** What the chosen supplier sells: undefined while it is being asked for, nothing where nobody is chosen. */
 function useOffers() {
   const supplierId = Number(useWatch({ name: 'supplierId' }) ?? 0);
-  const { data, isLoading } = useQuery(soldByQuery(supplierId > 0 ? supplierId : 0));
+  const { data, isLoading } = useQuery({
+    ...supplierOffersQuery({ supplierId }),
+    enabled: supplierId > 0,
+  });
   return useMemo(() => data?.items ?? (isLoading ? undefined : []), [data, isLoading]);
 }

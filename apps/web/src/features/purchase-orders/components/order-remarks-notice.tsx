@@ -1,14 +1,17 @@
 import type { PurchaseOrder } from '@hidewright/contract';
 import { useQuery } from '@tanstack/react-query';
 import { Notice } from '../../../components/notice.tsx';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { orderRemarks } from '../order-remarks.ts';
-import { soldByQuery } from '../purchase-orders.queries.ts';
 
-/** Before a draft is sent: what its supplier does not sell like that, and where more costs less or little more. */
+/**
+ * Before a draft is sent: what its supplier does not sell like that, where more costs less or little more, and what has
+ * no price.
+ */
 export function OrderRemarksNotice({ order }: { order: PurchaseOrder }) {
   const workshop = useWorkshop();
-  const { data } = useQuery(soldByQuery(order.supplierId));
+  const { data } = useQuery(supplierOffersQuery({ supplierId: order.supplierId }));
   const remarks = orderRemarks(order, data?.items ?? [], workshop);
   if (remarks.length === 0) return null;
   return (

@@ -12,13 +12,23 @@ const whatOf = (order: PurchaseOrder) => order.lines.map((line) => line.name).jo
 const expectedOf = ({ awaitedOn, arrivesOn, expectedOn }: PurchaseOrder) =>
   awaitedOn ?? arrivesOn ?? expectedOn;
 
-function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<PurchaseOrder>[] {
+interface Shown {
+  supplier: boolean;
+  prices: boolean;
+}
+
+function columnsFor({ currency, today }: Workshop, shown: Shown): Column<PurchaseOrder>[] {
   const total: Column<PurchaseOrder> = {
     id: 'total',
     header: `Total, ${currency}`,
     value: (row) => row.total,
     cell: (row) => row.total !== undefined && moneyText(row.total),
     align: 'right',
+  };
+  const supplier: Column<PurchaseOrder> = {
+    id: 'supplier',
+    header: 'Supplier',
+    value: (row) => row.supplierName,
   };
   return [
     {
@@ -28,7 +38,7 @@ function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<
       cell: (row) => <TextLink to={`/stockroom/purchase-orders/${row.id}`}>{row.number}</TextLink>,
       onPhone: 'title',
     },
-    { id: 'supplier', header: 'Supplier', value: (row) => row.supplierName },
+    ...(shown.supplier ? [supplier] : []),
     { id: 'what', header: 'What', value: whatOf },
     {
       id: 'state',
@@ -42,20 +52,30 @@ function columnsFor({ currency, today }: Workshop, withPrices: boolean): Column<
       value: expectedOf,
       cell: (row) => expectedOf(row) && dayText(expectedOf(row) ?? '', today),
     },
-    ...(withPrices ? [total] : []),
+    ...(shown.prices ? [total] : []),
   ];
 }
 
 interface PurchaseOrdersTableProps {
   rows: readonly PurchaseOrder[];
+  /** They all went to the supplier whose page it is. */
+  toOneSupplier?: boolean;
   empty: ReactNode;
   after?: ReactNode;
 }
 
-export function PurchaseOrdersTable({ rows, empty, after }: PurchaseOrdersTableProps) {
+export function PurchaseOrdersTable({
+  rows,
+  toOneSupplier = false,
+  empty,
+  after,
+}: PurchaseOrdersTableProps) {
   const workshop = useWorkshop();
-  const withPrices = rows.some((row) => row.total !== undefined);
-  const columns = useMemo(() => columnsFor(workshop, withPrices), [workshop, withPrices]);
+  const prices = rows.some((row) => row.total !== undefined);
+  const columns = useMemo(
+    () => columnsFor(workshop, { supplier: !toOneSupplier, prices }),
+    [workshop, toOneSupplier, prices],
+  );
   return (
     <DataTable
       label="Purchase orders"

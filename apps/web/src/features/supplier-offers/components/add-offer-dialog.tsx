@@ -4,7 +4,7 @@ import { Form } from '../../../components/form.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
 import { say } from '../../../components/toast.ts';
 import { useAddSupplierOffer } from '../supplier-offers.mutations.ts';
-import type { OfferedThing } from '../supplier-offers.queries.ts';
+import type { OfferedThing } from '../../../lib/supplier-offers.queries.ts';
 import { OfferFields } from './offer-fields.tsx';
 
 interface AddOfferDialogProps {

@@ -5,20 +5,26 @@ import { PlainField } from '../../../components/plain-field.tsx';
 import { moneyText } from '../../../lib/formatting.ts';
 import { areaUnits, readArea } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { buyMoreText, neededFault, quantityText } from '../offer-words.ts';
+import { buyMoreText, hasPrice, leftOutText, neededFault, quantityText } from '../offer-words.ts';
 
 type Unit = SupplierOfferReply['unit'];
 
-/** What a quantity really costs from each supplier, the least dear first. */
-export function BestBuy({ offers }: { offers: readonly SupplierOfferReply[] }) {
+/** What a quantity really costs from each supplier whose price is known, the least dear first. */
+export function BestBuy({ offers: all }: { offers: readonly SupplierOfferReply[] }) {
   const workshop = useWorkshop();
   const [text, setText] = useState('');
+  const offers = all.filter(hasPrice);
+  if (offers.length === 0) return null;
   const unit = offers[0]?.unit ?? 'piece';
   const needed = readNeeded(text, unit, workshop);
   const wrong = text.trim() !== '' && needed === undefined;
   const sign = unit === 'mm2' ? areaUnits[workshop.areaUnit].sign : 'pieces';
   return (
     <div className="mt-5 border-t border-stitch pt-4">
+      <p className="mb-3 max-w-prose text-ink-soft">
+        Where does it cost least? Type what you need: what it comes to at each supplier stands here,
+        with minimum, packs and price breaks.
+      </p>
       <PlainField
         label={unit === 'mm2' ? 'So much is needed' : 'So many are needed'}
         unit={sign}
@@ -27,7 +33,12 @@ export function BestBuy({ offers }: { offers: readonly SupplierOfferReply[] }) {
         onChange={setText}
       />
       <div role="status">
-        {needed !== undefined && <Answers buys={buysFor(offers, needed, unit)} offers={offers} />}
+        {needed !== undefined && (
+          <>
+            <Answers buys={buysFor(offers, needed, unit)} offers={offers} />
+            <p className="mt-3 text-sm text-ink-soft empty:hidden">{leftOutText(all)}</p>
+          </>
+        )}
       </div>
     </div>
   );

@@ -16,7 +16,8 @@ export function BreakFields({ of }: { of: 'leather' | 'hardware' }) {
     <fieldset>
       <legend className="mb-1 font-semibold">Prices</legend>
       <p className="mb-2 text-sm text-ink-soft">
-        Each holds for the whole order, once it comes to that much.
+        Each holds for the whole order, once it comes to that much. Enter 0 while a price is not
+        known.
       </p>
       <div className="space-y-3">
         {fields.map((field, at) => (

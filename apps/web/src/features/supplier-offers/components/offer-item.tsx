@@ -8,7 +8,7 @@ import { TextLink } from '../../../components/text-link.tsx';
 import { say } from '../../../components/toast.ts';
 import { countText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { soldText } from '../offer-words.ts';
+import { hasPrice, soldText } from '../offer-words.ts';
 import { useAdoptSupplierOffer, useRemoveSupplierOffer } from '../supplier-offers.mutations.ts';
 import { ChangeOfferDialog } from './change-offer-dialog.tsx';
 import { OfferLadder } from './offer-ladder.tsx';
@@ -54,11 +54,11 @@ function OfferActs({ offer, suppliers, ownPrice }: Omit<OfferItemProps, 'isOwner
   const adopt = useAdoptSupplierOffer();
   const remove = useRemoveSupplierOffer();
   const first = offer.breaks?.[0]?.price;
-  const inUse = offer.preferred && first !== undefined && Number(first) === Number(ownPrice);
+  const inUse = offer.preferred && Number(first) === Number(ownPrice);
   const name = <span className="sr-only">{` of ${offer.supplierName}`}</span>;
   return (
     <div className="mt-3 flex flex-wrap gap-2">
-      {!inUse && (
+      {hasPrice(offer) && !inUse && (
         <Button
           busy={adopt.isPending}
           onClick={() =>

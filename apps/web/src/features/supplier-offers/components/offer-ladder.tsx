@@ -1,5 +1,5 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
-import { areaPriceText, unitPriceText } from '../../../lib/formatting.ts';
+import { askedPriceText } from '../../../lib/formatting.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { quantityText } from '../offer-words.ts';
@@ -11,7 +11,7 @@ export function OfferLadder({ offer }: { offer: SupplierOfferReply }) {
   if (breaks === undefined) return null;
   const { areaUnit, currency } = workshop;
   const leather = unit === 'mm2';
-  const price = (text: string) => (leather ? areaPriceText(text, areaUnit) : unitPriceText(text));
+  const price = (text: string) => askedPriceText(text, leather ? areaUnit : undefined);
   const from = (text: string, at: number) => {
     const least = at === 0 && minimum !== null ? minimum : text;
     return at === 0 && Number(least) <= 1 ? 'any' : quantityText(least, unit, workshop);

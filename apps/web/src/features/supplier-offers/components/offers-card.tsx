@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
-import { supplierOffersQuery, type OfferedThing } from '../supplier-offers.queries.ts';
+import { supplierOffersQuery, type OfferedThing } from '../../../lib/supplier-offers.queries.ts';
 import { AddOfferDialog } from './add-offer-dialog.tsx';
 import { BestBuy } from './best-buy.tsx';
 import { OfferItem } from './offer-item.tsx';

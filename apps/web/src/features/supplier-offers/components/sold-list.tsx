@@ -1,11 +1,12 @@
 import type { SupplierOfferReply } from '@hidewright/contract';
+import { isPriceKnown } from '@hidewright/domain';
 import { useQuery } from '@tanstack/react-query';
 import { Card } from '../../../components/card.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { areaPriceText, unitPriceText } from '../../../lib/formatting.ts';
+import { askedPriceText } from '../../../lib/formatting.ts';
 import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { supplierOffersQuery } from '../supplier-offers.queries.ts';
+import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 
 /** What one supplier sells, as far as it was entered. */
 export function SoldList({ supplierId }: { supplierId: number }) {
@@ -13,7 +14,10 @@ export function SoldList({ supplierId }: { supplierId: number }) {
   const offers = data?.items ?? [];
   if (offers.length === 0) return null;
   return (
-    <Card title="What they sell" subtitle="as entered with each leather and hardware">
+    <Card
+      title="What they sell"
+      subtitle="as far as their prices are entered with the leather or the hardware"
+    >
       <ul className="space-y-2">
         {offers.map((offer) => (
           <SoldItem key={offer.id} offer={offer} />
@@ -26,11 +30,12 @@ export function SoldList({ supplierId }: { supplierId: number }) {
 function SoldItem({ offer }: { offer: SupplierOfferReply }) {
   const { areaUnit, currency } = useWorkshop();
   const { of, leatherId, hardwareId, name, breaks = [], articleNumber } = offer;
-  const prices = breaks.map(({ price }) =>
-    of === 'leather' ? areaPriceText(price, areaUnit) : unitPriceText(price),
-  );
+  const prices = breaks
+    .filter(({ price }) => isPriceKnown(price))
+    .map(({ price }) => askedPriceText(price, of === 'leather' ? areaUnit : undefined));
   const detail = [
     articleNumber && `article ${articleNumber}`,
+    breaks.length > 0 && prices.length === 0 && 'price not known',
     prices.length > 0 &&
       `${prices.join(', ')} ${currency} per ${of === 'leather' ? areaUnits[areaUnit].sign : 'piece'}`,
     offer.preferred && 'usually bought here',

@@ -3,9 +3,9 @@ import type { ReactNode } from 'react';
 import { Card } from '../../../components/card.tsx';
 import { KeyFigures } from '../../../components/key-figures.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { countText, dayText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { countText, dayText } from '../../../lib/formatting.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
-import { amountText, heldNote, wholeWords } from '../to-order-words.ts';
+import { amountText, heldNote, priceWords, wholeWords } from '../to-order-words.ts';
 import { ByHand } from './by-hand.tsx';
 import { ComingWeeks } from './coming-weeks.tsx';
 import { HowWorkedOut } from './how-worked-out.tsx';
@@ -72,12 +72,8 @@ function Kits({ item: { kits } }: { item: Item }) {
 
 function figuresOf(item: Item, workshop: Workshop) {
   const say = (value: string) => amountText(value, item, workshop);
-  const { whole, quantity, usual, unitPrice, amount } = item;
+  const { whole, quantity, usual } = item;
   const order = quantity === '0' ? usual : quantity;
-  const price =
-    amount === undefined || unitPrice === undefined
-      ? undefined
-      : `${moneyText(amount)} ${workshop.currency}, ${unitPriceText(unitPrice)} ${item.of === 'leather' ? 'a ft²' : 'each'}`;
   return [
     {
       word: 'on hand',
@@ -93,7 +89,10 @@ function figuresOf(item: Item, workshop: Workshop) {
           {
             word: item.state === 'now' ? 'order' : 'one order would be',
             figure: say(order),
-            note: [wholeWords(order, { whole }), price].filter(Boolean).join(', ') || undefined,
+            note:
+              [wholeWords(order, { whole }), priceWords(item, workshop)]
+                .filter(Boolean)
+                .join(', ') || undefined,
           },
         ]),
   ];

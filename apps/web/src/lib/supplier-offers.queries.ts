@@ -1,7 +1,7 @@
 import { listSupplierOffers } from '@hidewright/contract';
 import { queryOptions } from '@tanstack/react-query';
-import { call } from '../../lib/api.ts';
-import { everyPage } from '../../lib/every-page.ts';
+import { call } from './api.ts';
+import { everyPage } from './every-page.ts';
 
 export type OfferedThing = { leatherId: number } | { hardwareId: number };
 
