@@ -60,6 +60,18 @@ it('names the supplier’s own article, and how many sides the leather is', () =
   );
 });
 
+it('says the price of leather for the unit in which its area is said', () => {
+  const metric = { ...shop, areaUnit: 'dm2' } as const;
+  const leather = { ...russet, whole: null };
+  const order = { number: 'P-0012', lines: [leather, dyeing], expectedOn: null, note: '' };
+  const { body } = purchaseOrderLetter(order as unknown as PurchaseOrder, metric);
+  // 8.50 / 9.290304 and 1.65 / 9.290304
+  expect(body).toContain(
+    '- 1,021.9 dm² of Oak tan russet, your article OT-7, at USD 0.9149 per dm²',
+  );
+  expect(body).toContain('230.4 dm², to become Fen Veg black, at USD 0.1776 per dm²');
+});
+
 it('says figures and days as they are said everywhere else', () => {
   const leather = { ...russet, whole: null, areaMm2: '232257600' };
   const body = letterFor([leather, rivets], { total: '21505.00', expectedOn: '2026-12-14' });

@@ -2,7 +2,7 @@ import { countedWords, figureWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { sayDay } from '../../say-day.ts';
-import { sayArea } from '../stock/say-area.ts';
+import { areaPriceOf, sayArea } from '../stock/say-area.ts';
 import { sayOrderedArea } from './ordered-area.ts';
 
 interface Sender {
@@ -46,10 +46,19 @@ function asking({ number, lines }: PurchaseOrder): string {
 }
 
 function sayLine(line: PurchaseLine, { areaUnit, currency }: Sender): string {
-  const price = `${currency} ${line.unitPrice ?? ''}`;
   if (line.service !== null) return sayWork(line, line.service, { areaUnit, currency });
-  if (line.areaMm2 === null) return sayCounted(line, price);
-  return `- ${sayOrderedArea(line, areaUnit)} of ${nameAndArticle(line)}, at ${price} per ft²`;
+  if (line.areaMm2 === null) return sayCounted(line, `${currency} ${line.unitPrice ?? ''}`);
+  const price = sayAreaPrice(line, { areaUnit, currency });
+  return `- ${sayOrderedArea(line, areaUnit)} of ${nameAndArticle(line)}, at ${price}`;
+}
+
+/** USD 9.50 per ft² */
+function sayAreaPrice(
+  { unitPrice = '0.00' }: PurchaseLine,
+  { areaUnit, currency }: Pick<Sender, 'areaUnit' | 'currency'>,
+): string {
+  const price = areaPriceOf(unitPrice, areaUnit);
+  return `${currency} ${price.unitPrice} ${price.per}`;
 }
 
 /** - 1,500 × Rivets 7 mm, at USD 0.11 each; - 250 ml of Edge dye, at USD 0.04 per ml */
@@ -76,7 +85,7 @@ function sayWork(
     sayArea(new Decimal(line.areaMm2 ?? 0), areaUnit),
     ...(changes ? [`to become ${becomesName}`] : []),
     price === null
-      ? `at ${currency} ${line.unitPrice ?? ''} per ft²`
+      ? `at ${sayAreaPrice(line, { areaUnit, currency })}`
       : `at ${currency} ${price} for the lot`,
   ];
   return `- ${parts.join(', ')}`;

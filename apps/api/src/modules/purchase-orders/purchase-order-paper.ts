@@ -3,6 +3,7 @@ import type { PurchasedService, PurchaseLine } from '@hidewright/contract';
 import { dayIn } from '../../day-in.ts';
 import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
 import type { Work } from '../../work.ts';
+import { areaPriceOf } from '../stock/say-area.ts';
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { sayOrderedArea } from './ordered-area.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
@@ -48,10 +49,9 @@ function printedLine(
       areaMm2 === null
         ? countedWords(quantity ?? 0, unit ?? 'piece')
         : sayOrderedArea(line, areaUnit),
-    unitPrice,
-    per: areaMm2 === null ? perWord(unit) : 'per ft²',
+    ...(areaMm2 === null ? { unitPrice, per: perWord(unit) } : areaPriceOf(unitPrice, areaUnit)),
     amount,
-    ...(line.service !== null && workOf(line, line.service)),
+    ...(line.service !== null && workOf(line, line.service, areaUnit)),
   };
 }
 
@@ -62,11 +62,13 @@ const perWord = (unit: PurchaseLine['unit']): string =>
 function workOf(
   { name, fixedPrice, unitPrice = '0.00' }: PurchaseLine,
   { changes, becomesName }: PurchasedService,
+  areaUnit: Workshop['areaUnit'],
 ) {
   const fixed = fixedPrice ?? null;
   return {
     name: changes ? `${name}, to become ${becomesName}` : name,
-    unitPrice: fixed ?? unitPrice,
-    per: fixed === null ? 'per ft²' : 'for the lot',
+    ...(fixed === null
+      ? areaPriceOf(unitPrice, areaUnit)
+      : { unitPrice: fixed, per: 'for the lot' }),
   };
 }

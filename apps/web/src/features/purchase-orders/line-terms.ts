@@ -8,8 +8,14 @@ import {
   type OrderedQuantity,
 } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
-import { areaText, countText, moneyText, unitPriceText } from '../../lib/formatting.ts';
-import { isFigure } from '../../lib/units.ts';
+import {
+  areaPriceText,
+  areaText,
+  countText,
+  moneyText,
+  unitPriceText,
+} from '../../lib/formatting.ts';
+import { areaUnits, isFigure } from '../../lib/units.ts';
 import type { Workshop } from '../../lib/workshop.tsx';
 
 /** At which quantities and prices the chosen supplier sells what is on a line. */
@@ -110,8 +116,11 @@ function moreText(
   habit: Habit,
 ): string {
   const say = sayIn(terms, habit);
-  const price = unitPriceText(more.price);
-  const each = terms.unit === 'mm2' ? `it costs ${price} per ft²` : `they cost ${price} each`;
+  const { areaUnit } = habit;
+  const each =
+    terms.unit === 'mm2'
+      ? `it costs ${areaPriceText(more.price, areaUnit)} per ${areaUnits[areaUnit].sign}`
+      : `they cost ${unitPriceText(more.price)} each`;
   const [here, there] = [say(plain.quantity), say(more.quantity)];
   return `From ${there} ${each}: ${there} cost ${differenceText(plain, more)} ${here}.`;
 }

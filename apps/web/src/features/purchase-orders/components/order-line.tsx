@@ -3,6 +3,7 @@ import type { SupplierOfferReply } from '@hidewright/contract';
 import { unitWord } from '@hidewright/domain';
 import { useWatch } from 'react-hook-form';
 import { AreaField } from '../../../components/area-field.tsx';
+import { AreaPriceField } from '../../../components/area-price-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
@@ -55,11 +56,11 @@ export function OrderLine({ at, of, goods, offers, onRemove }: OrderLineProps) {
           help={packs}
         />
       )}
-      <MoneyField
-        name={`${line}.unitPrice`}
-        label="Price"
-        per={of === 'leather' ? 'ft²' : unitWord(unit)}
-      />
+      {of === 'leather' ? (
+        <AreaPriceField name={`${line}.unitPrice`} label="Price" />
+      ) : (
+        <MoneyField name={`${line}.unitPrice`} label="Price" per={unitWord(unit)} />
+      )}
       <button
         type="button"
         onClick={onRemove}

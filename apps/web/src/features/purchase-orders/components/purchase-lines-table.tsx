@@ -5,8 +5,9 @@ import type { Column } from '../../../components/column.ts';
 import { DataTable } from '../../../components/data-table.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
 import { TextLink } from '../../../components/text-link.tsx';
-import { countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
+import { areaPriceText, countText, moneyText, unitPriceText } from '../../../lib/formatting.ts';
 import { sumMoney } from '../../../lib/sum-money.ts';
+import { areaUnits } from '../../../lib/units.ts';
 import { useWorkshop, type Workshop } from '../../../lib/workshop.tsx';
 import { goodsText } from '../goods-text.ts';
 import { AwaitedDayDialog } from './awaited-day-dialog.tsx';
@@ -56,9 +57,12 @@ function OrderedOf({ line }: { line: PurchaseLine }) {
 }
 
 function PriceOf({ line: { of, unitPrice, fixedPrice = null } }: { line: PurchaseLine }) {
+  const { areaUnit } = useWorkshop();
   if (fixedPrice !== null) return `${moneyText(fixedPrice)} for the lot`;
   if (unitPrice === undefined) return null;
-  return `${unitPriceText(unitPrice)} ${of === 'hardware' ? 'each' : 'per ft²'}`;
+  return of === 'hardware'
+    ? `${unitPriceText(unitPrice)} each`
+    : `${areaPriceText(unitPrice, areaUnit)} per ${areaUnits[areaUnit].sign}`;
 }
 
 function priceColumns(currency: string, order: PurchaseOrder): Column<PurchaseLine>[] {

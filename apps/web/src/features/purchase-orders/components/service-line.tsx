@@ -2,6 +2,7 @@ import { X } from 'lucide-react';
 import { useEffect } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { AreaField } from '../../../components/area-field.tsx';
+import { AreaPriceField } from '../../../components/area-price-field.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { rackAreaText } from '../../../lib/formatting.ts';
@@ -51,14 +52,7 @@ export function ServiceLine({ at, lots, leathers, onRemove }: ServiceLineProps) 
           choices={leathers.map(({ id, name }) => ({ value: id, label: name }))}
         />
         <div className="flex flex-wrap gap-x-4 gap-y-3 sm:col-span-2">
-          <MoneyField
-            name={`${line}.unitPrice`}
-            label="Price"
-            per="ft²"
-            short
-            optional
-            whenEmpty="null"
-          />
+          <AreaPriceField name={`${line}.unitPrice`} label="Price" optional whenEmpty="null" />
           <MoneyField
             name={`${line}.fixedPrice`}
             label="Or for the lot"
