@@ -9,6 +9,8 @@ describe('a tag that was scanned', () => {
     ['https://shop.example.com/t/T-0012', 'T-0012'],
     ['https://shop.example.com/t/HIDE%207/?from=tag', 'HIDE 7'],
     ['http://localhost:4370/t/B-0003#x', 'B-0003'],
+    // a hand scanner whose capitals are locked
+    ['HTTPS://SHOP.EXAMPLE.COM/T/T-0032', 'T-0032'],
     ['100%', '100%'],
   ])('is read from %j', (text, tag) => {
     expect(scannedTag(text)).toBe(tag);

@@ -7,7 +7,7 @@ const bin = /^B-0*([1-9]\d{0,8})$/i;
  * left, or more than 60 characters.
  */
 export function scannedTag(text: string): string | undefined {
-  const [, last] = /\/t\/([^/?#]+)\/?(?:[?#].*)?$/.exec(text.trim()) ?? [];
+  const [, last] = /\/t\/([^/?#]+)\/?(?:[?#].*)?$/i.exec(text.trim()) ?? [];
   const tag = decoded(last ?? text)
     .replaceAll(/\p{Cc}/gu, ' ')
     .trim();
