@@ -19,7 +19,7 @@ export function DataTableHead<Row>({ columns, sorting, onSort }: DataTableHeadPr
   return (
     <thead
       {...tableRoles.group}
-      className="sticky top-0 z-10 hidden bg-card shadow-[0_1px_0_var(--color-edge)] md:table-header-group"
+      className="sticky top-0 z-10 hidden bg-card shadow-[0_1px_0_var(--color-edge)] lg:table-header-group"
     >
       <tr {...tableRoles.row}>
         {columns.map((column) => (

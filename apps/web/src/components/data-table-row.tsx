@@ -7,16 +7,16 @@ export function DataTableRow<Row>({ columns, row }: { columns: readonly Column<R
   return (
     <tr
       {...tableRoles.row}
-      className="block rounded border border-stitch bg-card px-3 py-2 md:table-row md:border-0 md:hover:bg-manila/40 md:[&>td]:border-b md:[&>td]:border-stitch/60 [&_a]:inline-block [&_a]:py-0.5"
+      className="block rounded border border-stitch bg-card px-3 py-2 lg:table-row lg:border-0 lg:hover:bg-manila/40 lg:[&>td]:border-b lg:[&>td]:border-stitch/60 [&_a]:inline-block [&_a]:py-0.5"
     >
       {columns.map((column) => (
         <td key={column.id} {...tableRoles.cell} className={cellLook(column, row)}>
           {column.onPhone !== 'title' && column.header !== '' && (
-            <span aria-hidden="true" className="shrink-0 text-sm text-ink-soft md:hidden">
+            <span aria-hidden="true" className="shrink-0 text-sm text-ink-soft lg:hidden">
               {column.header}
             </span>
           )}
-          <span className="min-w-0 text-right wrap-anywhere md:contents md:[text-align:inherit]">
+          <span className="min-w-0 text-right wrap-anywhere lg:contents lg:[text-align:inherit]">
             {column.cell ? column.cell(row) : column.value(row)}
           </span>
         </td>
@@ -25,15 +25,22 @@ export function DataTableRow<Row>({ columns, row }: { columns: readonly Column<R
   );
 }
 
+/** A word such as received or P-0012 is never broken, however narrow its column. */
+const isShortWord = (value: unknown) => typeof value === 'string' && /^\S{1,14}$/.test(value);
+
 function cellLook<Row>(column: Column<Row>, row: Row): string {
-  const figures = column.align === 'right' && 'md:text-right whitespace-nowrap';
-  const says = column.cell !== undefined || (column.value(row) ?? '') !== '';
+  const value = column.value(row);
+  const figures = classNames(
+    column.align === 'right' && 'lg:text-right whitespace-nowrap',
+    isShortWord(value) && 'whitespace-nowrap',
+  );
+  const says = column.cell !== undefined || (value ?? '') !== '';
   // A card leaves out what a row leaves blank.
   if (column.onPhone === 'hidden' || !says)
-    return classNames('hidden md:table-cell md:px-3 md:py-2.5', figures);
+    return classNames('hidden lg:table-cell lg:px-3 lg:py-2.5', figures);
   return classNames(
-    'flex items-baseline justify-between gap-4 py-0.5 md:table-cell md:px-3 md:py-2.5',
-    column.onPhone === 'title' && 'font-semibold md:font-normal',
+    'flex items-baseline justify-between gap-4 py-0.5 lg:table-cell lg:px-3 lg:py-2.5',
+    column.onPhone === 'title' && 'font-semibold lg:font-normal',
     figures,
   );
 }

@@ -53,7 +53,7 @@ function OrderSelect<Row>({ columns, sorting, onSort }: DataTableToolsProps<Row>
   const id = useId();
   const sortable = columns.filter((column) => column.sortable !== false);
   return (
-    <div className="flex items-center gap-2 md:hidden">
+    <div className="flex items-center gap-2 lg:hidden">
       <label htmlFor={id} className="text-sm text-ink-soft">
         Order by
       </label>

@@ -60,19 +60,19 @@ export function DataTable<Row extends RowData>(props: DataTableProps<Row>) {
         onSort={(id, desc) => table.setSorting([{ id, desc }])}
         sheetAddress={sheetAddress}
       />
-      <table {...tableRoles.table} aria-label={label} className="block w-full md:table">
+      <table {...tableRoles.table} aria-label={label} className="block w-full lg:table">
         <DataTableHead
           columns={columns}
           sorting={sorting}
           onSort={(id, desc) => table.setSorting([{ id, desc }])}
         />
-        <tbody {...tableRoles.group} className="block space-y-2 md:table-row-group">
+        <tbody {...tableRoles.group} className="block space-y-2 lg:table-row-group">
           {shown.map((row) => (
             <DataTableRow key={row.id} columns={columns} row={row.original} />
           ))}
         </tbody>
         {hasTotals && (
-          <tfoot {...tableRoles.group} className="mt-2 block md:table-footer-group">
+          <tfoot {...tableRoles.group} className="mt-2 block lg:table-footer-group">
             <TotalsRow columns={columns} rows={shown.map((row) => row.original)} />
           </tfoot>
         )}
@@ -106,22 +106,22 @@ function TotalsRow<Row>({
   return (
     <tr
       {...tableRoles.row}
-      className="block border-t-2 border-edge px-3 py-2 font-bold md:table-row md:px-0"
+      className="block border-t-2 border-edge px-3 py-2 font-bold lg:table-row lg:px-0"
     >
       {columns.map((column, index) => (
         <td
           key={column.id}
           {...tableRoles.cell}
           className={classNames(
-            'md:table-cell md:px-3 md:py-2',
-            column.align === 'right' && 'md:text-right',
+            'lg:table-cell lg:px-3 lg:py-2',
+            column.align === 'right' && 'lg:text-right',
             column.total || index === 0 ? 'flex justify-between gap-4' : 'hidden',
           )}
         >
           {index === 0 && first !== 0 ? 'Total' : null}
           {column.total && (
             <>
-              <span className="font-normal text-ink-soft md:hidden">{column.header}</span>
+              <span className="font-normal text-ink-soft lg:hidden">{column.header}</span>
               {column.total(rows)}
             </>
           )}

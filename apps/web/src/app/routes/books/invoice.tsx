@@ -36,7 +36,7 @@ export function Component() {
   return (
     <div className="space-y-5">
       <InvoiceTicket invoice={invoice} actions={<InvoiceActions invoice={invoice} />} />
-      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_minmax(0,22rem)]">
+      <div className="grid items-start gap-5 xl:grid-cols-[minmax(0,1fr)_minmax(0,22rem)]">
         <div className="space-y-5">
           <InvoiceLines
             invoice={invoice}

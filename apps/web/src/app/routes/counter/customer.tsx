@@ -40,7 +40,7 @@ export function Component() {
   return (
     <>
       <PageHeader title={customer.name} action={isOwner ? newQuote : undefined} />
-      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,26rem)_minmax(0,1fr)]">
+      <div className="grid items-start gap-5 xl:grid-cols-[minmax(0,26rem)_minmax(0,1fr)]">
         <Card title="How to reach them">
           <ChangeCustomerForm key={customer.id} customer={customer} />
         </Card>

@@ -19,7 +19,7 @@ export function Component() {
     <>
       <PageHeader title="People" subtitle="Who signs in, and as what" />
       <OfficeNav />
-      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-5 lg:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
+      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-5 xl:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
         <Card title="Who signs in">
           <PeopleList people={people.items} />
         </Card>

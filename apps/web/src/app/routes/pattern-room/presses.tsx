@@ -31,7 +31,7 @@ export function Component() {
         }
       />
       <PatternRoomNav />
-      <div className={isOwner ? 'grid items-start gap-5 lg:grid-cols-[minmax(0,1fr)_24rem]' : ''}>
+      <div className={isOwner ? 'grid items-start gap-5 xl:grid-cols-[minmax(0,1fr)_24rem]' : ''}>
         <PressesTable
           rows={presses.items}
           mayChange={isOwner}

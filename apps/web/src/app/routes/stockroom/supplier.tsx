@@ -40,7 +40,7 @@ export function Component() {
   return (
     <>
       <PageHeader title={supplier.name} action={order} />
-      <div className="grid items-start gap-5 lg:grid-cols-[minmax(0,24rem)_minmax(0,1fr)]">
+      <div className="grid items-start gap-5 xl:grid-cols-[minmax(0,24rem)_minmax(0,1fr)]">
         <Card title="How to reach them">
           {isOwner ? (
             <ChangeSupplierForm key={id} supplier={supplier} />

@@ -49,7 +49,7 @@ function columnsFor(today: string): Column<Order>[] {
       header: 'State',
       value: (row) => row.state,
       cell: (row) => (
-        <span className="inline-flex flex-wrap justify-end gap-1.5 md:justify-start">
+        <span className="inline-flex flex-wrap justify-end gap-1.5 lg:justify-start">
           {row.awaits.length > 0 ? (
             row.awaits.map((what) => <StateMark key={what} state={`awaiting ${what}`} />)
           ) : (

@@ -10,15 +10,15 @@ export function StandingCard({ hardwareId }: { hardwareId: number }) {
   const [level] = data?.hardware ?? [];
   if (level === undefined) return null;
   const { free, onOrder, promised } = level.standing;
-  const left = Number(free) + Number(onOrder) - Number(promised);
+  const there = Number(free) + Number(onOrder);
+  const left = there - Number(promised);
   return (
-    <Card title="Free and on order">
+    <Card title="Left to promise">
       <KeyFigures
         figures={[
-          { word: 'Free now', figure: countText(Number(free)) },
-          { word: 'On order', figure: countText(Number(onOrder)) },
+          { word: 'Free and on order', figure: countText(there) },
           {
-            word: 'Promised of both',
+            word: 'Promised of it',
             figure: countText(Number(promised)),
             note: 'what open jobs need and is not held for them',
           },
