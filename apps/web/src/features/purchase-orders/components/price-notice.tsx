@@ -25,13 +25,7 @@ export function PriceNotice({ receipt, isOwner }: { receipt: Receipt; isOwner: b
         tone="attention"
         className="mb-4"
         title="Not at its price:"
-        actions={
-          isOwner && (
-            <Button tone="quiet" onClick={() => setAsking(true)}>
-              Let the price stand
-            </Button>
-          )
-        }
+        actions={isOwner && <Button onClick={() => setAsking(true)}>Let the price stand</Button>}
       >
         {difference}.
       </Notice>

@@ -35,7 +35,10 @@ export function ShortNotice({ receipt, order, isOwner }: ShortNoticeProps) {
           isOwner &&
           order && (
             <>
-              <Button tone={notClaimed ? 'quiet' : 'primary'} onClick={() => setAsking('claim')}>
+              <Button
+                tone={notClaimed ? 'secondary' : 'primary'}
+                onClick={() => setAsking('claim')}
+              >
                 Claim it
               </Button>
               {!notClaimed && (
