@@ -1,4 +1,4 @@
-import supertest from 'supertest';
+import type supertest from 'supertest';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Today } from '@hidewright/contract';
 import { ft2, orderMore, stockUp } from '../../testing/stockroom.ts';
