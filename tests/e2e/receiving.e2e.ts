@@ -154,6 +154,10 @@ walk(
     await context.close();
 
     await visit(page, `${hidewright.url}/stockroom/purchase-orders/${order.id}`);
+    await page.getByRole('button', { name: 'Do not claim' }).press('Enter');
+    await page.getByRole('dialog').getByRole('button', { name: 'Do not claim' }).press('Enter');
+    await page.getByText(/smaller than marked \(Ines Okafor-Lund, /).waitFor();
+    // On second thoughts.
     await page.getByRole('button', { name: 'Claim it' }).click();
     const claim = page.getByRole('dialog');
     const letter = claim.getByLabel('What you write');
@@ -171,9 +175,17 @@ walk(
     await page.getByRole('button', { name: 'Put right what it cost' }).first().click();
     const costs = page.getByRole('dialog');
     await costs.getByLabel(/^Freight/).fill('12.34');
+    await costs.getByLabel(/^Paid for Snaps/).fill('49.00');
     await expectAccessible(page);
     await costs.getByRole('button', { name: 'Save the cost' }).click();
     await page.getByText(/freight 12.34, shared out by value/).waitFor();
+    await page.getByText('USD 1.00 more than ordered.').waitFor();
+    await page.getByRole('button', { name: 'Let the price stand' }).click();
+    const standing = page.getByRole('dialog');
+    await standing.getByLabel(/^Why/).fill('A new price list');
+    await expectAccessible(page);
+    await standing.getByRole('button', { name: 'Let it stand' }).click();
+    await page.getByText(/USD 1.00 more than ordered: A new price list \(Ines/).waitFor();
     await page.getByRole('button', { name: 'Send something back' }).click();
     const back = page.getByRole('dialog');
     await back.getByLabel('What', { exact: true }).selectOption({ label: 'Snaps, line 20, brass' });

@@ -54,6 +54,10 @@ export const receiptLine = z
   .meta({ id: 'ReceiptLine' });
 export type ReceiptLine = z.infer<typeof receiptLine>;
 
+/** What the owner said to a delivery that differs; it holds for what stood then. */
+const deliveryAnswer = z.object({ reason: z.string(), at: z.string(), by: z.string() });
+export type DeliveryAnswer = z.infer<typeof deliveryAnswer>;
+
 export const receipt = z
   .object({
     id,
@@ -68,6 +72,12 @@ export const receipt = z
     sharedBy: z.enum(carriageBases),
     /** In words, why what it cost stays as it is; null while it can be put right. */
     staysBecause: z.string().nullable(),
+    /** How much more its goods cost than at their order's prices; nothing where no order says a price. */
+    priceDifference: confidential(z.string()),
+    /** That this difference is let stand. */
+    letStand: confidential(deliveryAnswer.nullable()),
+    /** That what is short is not claimed; a claim may follow all the same. */
+    notClaimed: confidential(deliveryAnswer.nullable()),
     lines: z.array(receiptLine),
     version,
   })
@@ -186,5 +196,20 @@ export const changeReceipt = endpoint({
       goods: z.array(z.strictObject({ receiptLineId: id, goods: money })).max(400),
     })
     .partial(),
+  reply: receipt,
+});
+
+export const answerDelivery = endpoint({
+  method: 'POST',
+  path: '/receipts/{id}/answers',
+  summary: 'Let the price of a delivery stand, or do not claim what is short in it',
+  access: ['owner'],
+  creates: true,
+  edits: true,
+  params: idParams,
+  body: z.strictObject({
+    matter: z.enum(['price', 'short'], 'Say whether it is about the price or about what is short.'),
+    reason: optionalLine(200).default(''),
+  }),
   reply: receipt,
 });

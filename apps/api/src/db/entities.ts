@@ -37,6 +37,7 @@ import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts
 import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
 import { QuoteBreak } from '../modules/quotes/quote-break.entity.ts';
 import { Quote } from '../modules/quotes/quote.entity.ts';
+import { DeliveryAnswer } from '../modules/receipts/delivery-answer.entity.ts';
 import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
 import { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { ReservationMovement } from '../modules/stock/reservation-movement.entity.ts';
@@ -99,6 +100,7 @@ export const entities = [
   Quote,
   QuoteBreak,
   Receipt,
+  DeliveryAnswer,
   ReceiptLine,
   Reservation,
   ReservationMovement,

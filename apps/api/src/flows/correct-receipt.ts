@@ -5,9 +5,11 @@ import { moneyText } from '../http/decimal-text.ts';
 import { invalid, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
 import { findLot } from '../modules/lots/find-lot.ts';
+import { priceDifferenceOf } from '../modules/purchase-orders/paid-for-lines.ts';
+import { raiseVersion } from '../modules/receipts/raise-version.ts';
 import { readOneReceipt } from '../modules/receipts/read-receipts.ts';
 import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
-import { Receipt } from '../modules/receipts/receipt.entity.ts';
+import type { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { receiveStock, undoReceipt } from '../modules/stock/stock-ledger.ts';
 import { sayDay } from '../say-day.ts';
 import type { Work } from '../work.ts';
@@ -42,6 +44,7 @@ export async function correctReceipt(
   if (typed.sharedBy !== undefined) receipt.sharedBy = typed.sharedBy;
   shareOut(receipt, lines);
   for (const line of lines) await putBack(work, receipt, line);
+  receipt.priceDifference = await priceDifferenceOf(work.em, lines);
   await raiseVersion(work, receipt, readVersion);
   await logDeed(work, {
     action: `put right what the delivery of ${sayDay(receipt.receivedOn)} cost`,
@@ -96,12 +99,4 @@ async function putBack(work: Work, receipt: Receipt, line: ReceiptLine) {
   if (line.lotId !== null) (await findLot(work.em, line.lotId)).cost = value;
   const put = { ...itemOf(line), quantity, value, purchaseOrderId, reason };
   line.movementId = (await receiveStock(work, put)).id;
-}
-
-/** Also where only the cost of goods was typed, which stands on the lines. */
-async function raiseVersion(work: Work, receipt: Receipt, readVersion: number): Promise<void> {
-  await work.em.flush();
-  if (receipt.version > readVersion) return;
-  await work.em.nativeUpdate(Receipt, { id: receipt.id }, { sharedBy: receipt.sharedBy });
-  await work.em.refresh(receipt);
 }

@@ -5,7 +5,9 @@ import { logDeed } from '../modules/activity/activity-log.ts';
 import { readOneHardware } from '../modules/hardware/read-hardware.ts';
 import { readOneLot } from '../modules/lots/read-lots.ts';
 import { OpenDelivery } from '../modules/purchase-orders/open-delivery.ts';
+import { priceDifferenceOf } from '../modules/purchase-orders/paid-for-lines.ts';
 import { readOnePurchaseOrder } from '../modules/purchase-orders/read-purchase-orders.ts';
+import { missingAreaOf } from '../modules/receipts/missing-area.ts';
 import { readOneReceipt } from '../modules/receipts/read-receipts.ts';
 import { ReceiptLine } from '../modules/receipts/receipt-line.entity.ts';
 import { Receipt } from '../modules/receipts/receipt.entity.ts';
@@ -47,13 +49,13 @@ export async function receiveDelivery(work: Work, asked: Delivery): Promise<Rece
 
 async function takeIn(work: Work, delivery: OpenDelivery, asked: Delivery): Promise<number> {
   const receivedOn = asked.receivedOn ?? work.today;
-  const receipt = await writeReceipt(work, asked, receivedOn);
   const priced: PricedLine[] = [];
   for (const [at, typed] of asked.lots.entries())
     priced.push(await priceLot(work, delivery, typed, `lots.${at}`));
   for (const [at, typed] of asked.hardware.entries())
     priced.push(await priceHardware(work, delivery, typed, `hardware.${at}`));
   const told = await withServices(work, priced);
+  const receipt = await writeReceipt(work, asked, { receivedOn, came: told });
   for (const [at, line] of withCarriage(told, asked).entries()) {
     const rack = { receivedOn, purchaseOrderId: asked.purchaseOrderId };
     const { lotId, hardwareId, movementId } = await putOnRack(work, line, rack);
@@ -82,8 +84,17 @@ async function takeIn(work: Work, delivery: OpenDelivery, asked: Delivery): Prom
   return receipt.id;
 }
 
-async function writeReceipt(work: Work, asked: Delivery, receivedOn: string): Promise<Receipt> {
-  const workshop = await work.em.findOneOrFail(Workshop, 1);
+interface Came {
+  receivedOn: string;
+  came: PricedLine[];
+}
+
+async function writeReceipt(
+  work: Work,
+  asked: Delivery,
+  { receivedOn, came }: Came,
+): Promise<Receipt> {
+  const { areaTolerancePercent } = await work.em.findOneOrFail(Workshop, 1);
   const receipt = work.em.create(Receipt, {
     purchaseOrderId: asked.purchaseOrderId,
     receivedOn,
@@ -91,7 +102,9 @@ async function writeReceipt(work: Work, asked: Delivery, receivedOn: string): Pr
     freight: new Decimal(asked.freight),
     duty: new Decimal(asked.duty),
     sharedBy: asked.sharedBy,
-    tolerancePercent: workshop.areaTolerancePercent,
+    tolerancePercent: areaTolerancePercent,
+    priceDifference: await priceDifferenceOf(work.em, came),
+    missingAreaMm2: missingAreaOf(came, areaTolerancePercent),
     actorId: work.actor.id,
     actorName: work.actor.name,
   });

@@ -20,6 +20,7 @@ import { TheChangedOrders } from './migration-20261209-the-changed-orders.ts';
 import { TheMarks } from './migration-20261209-the-marks.ts';
 import { TheCredits } from './migration-20261210-the-credits.ts';
 import { TheDraftedFor } from './migration-20261211-the-drafted-for.ts';
+import { TheAnswers } from './migration-20261212-the-answers.ts';
 
 /** In the order in which they run; a test compares this list with the folder. */
 export const migrations = [
@@ -45,4 +46,5 @@ export const migrations = [
   { name: 'migration-20261209-the-marks', class: TheMarks },
   { name: 'migration-20261210-the-credits', class: TheCredits },
   { name: 'migration-20261211-the-drafted-for', class: TheDraftedFor },
+  { name: 'migration-20261212-the-answers', class: TheAnswers },
 ];

@@ -1,5 +1,15 @@
 import { none, type Rule } from './rule.ts';
 
+/** Thousandths of mm² at ten-thousandths per ft², in hundredths; in two parts, which keeps large areas within whole numbers. */
+const ofLeather = (area: string) =>
+  `CAST(${area} / 9290304000 * n.unit_price + (${area} % 9290304000 * n.unit_price + 4645152000) / 9290304000 AS INTEGER)`;
+
+/** What the rows of one delivery on one line would have cost at the order's price, each to the cent. */
+const atOrderedPrice = `CASE
+  WHEN n.service IS NOT NULL THEN COALESCE(n.fixed_price, ${ofLeather('n.quantity')})
+  WHEN n.leather_id IS NOT NULL THEN SUM(${ofLeather('COALESCE(l.marked_area_mm2, l.quantity)')})
+  ELSE SUM(CAST((l.quantity * n.unit_price + 50) / 100 AS INTEGER)) END`;
+
 export const buyingRules: Rule[] = [
   none(
     'An order line counts as received what came on it',
@@ -21,6 +31,27 @@ export const buyingRules: Rule[] = [
       COALESCE(SUM(l.carriage), 0) AS fault
     FROM receipt r LEFT JOIN receipt_line l ON l.receipt_id = r.id
     GROUP BY r.id HAVING COALESCE(SUM(l.carriage), 0) <> r.freight + r.duty`,
+  ),
+  none(
+    'A delivery knows how much more it cost than at the prices of its order',
+    `SELECT 'the delivery of ' || r.received_on || ' says ' || r.price_difference || ' more than ordered, its lines ' || more AS fault
+    FROM (SELECT r.*, COALESCE((SELECT SUM(of_line.more) FROM (
+        SELECT SUM(l.goods) - ${atOrderedPrice} AS more FROM receipt_line l JOIN purchase_line n ON n.id = l.purchase_line_id
+        WHERE l.receipt_id = r.id GROUP BY n.id) of_line), 0) AS more FROM receipt r) r
+    WHERE r.price_difference <> more`,
+  ),
+  none(
+    'A delivery knows what is missing of the lots in it that are short of their mark',
+    `SELECT 'the delivery of ' || r.received_on || ' says ' || r.missing_area_mm2 || ' missing, its lots ' || missing AS fault
+    FROM (SELECT r.*, COALESCE((SELECT SUM(l.marked_area_mm2 - l.quantity) FROM receipt_line l WHERE l.receipt_id = r.id
+        AND (l.marked_area_mm2 - l.quantity) * 1000000 > r.tolerance_percent * l.marked_area_mm2), 0) AS missing FROM receipt r) r
+    WHERE r.missing_area_mm2 <> missing`,
+  ),
+  none(
+    'What is not claimed is what is missing in a delivery for an order, and a price is let stand of such a delivery only',
+    `SELECT 'an answer to the delivery of ' || r.received_on || ' is of another' AS fault
+    FROM delivery_answer a JOIN receipt r ON r.id = a.receipt_id
+    WHERE r.purchase_order_id IS NULL OR a.missing_area_mm2 <> r.missing_area_mm2`,
   ),
   none(
     'What came stands in the ledger with its quantity, at what goods and carriage cost and what leather had cost before a service',

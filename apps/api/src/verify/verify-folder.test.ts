@@ -151,6 +151,22 @@ describe('verifying a data folder', () => {
       'what came on it',
     ],
     [
+      'what a delivery cost more than was ordered',
+      'UPDATE receipt SET price_difference = price_difference - 1 WHERE id = 1',
+      'how much more it cost than at the prices of its order',
+    ],
+    [
+      'what is missing in a delivery',
+      'UPDATE receipt SET missing_area_mm2 = 0',
+      'is missing of the lots in it',
+    ],
+    [
+      'an answer to a delivery that misses nothing',
+      `INSERT INTO delivery_answer (receipt_id, matter, missing_area_mm2, reason, at, actor_name)
+        SELECT MIN(id), 'short', 1, '', '2026-12-01', 'Nobody' FROM receipt WHERE missing_area_mm2 = 0`,
+      'What is not claimed is what is missing',
+    ],
+    [
       'what was counted',
       `UPDATE count_line SET counted = counted + 1 WHERE movement_id IS NOT NULL`,
       'posted each of its differences',

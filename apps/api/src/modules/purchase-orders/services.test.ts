@@ -204,10 +204,13 @@ describe('what comes back', () => {
     );
     const lots = [back(order, 7), back(order, 5, { leatherId: things.leatherId })];
     const { body } = await receive(order, { lots }).expect(201);
-    expect(body.receipt.lines).toMatchObject([
-      { material: '36.75', goods: '14.59' },
-      { material: '26.25', goods: '10.42' },
-    ]);
+    expect(body.receipt).toMatchObject({
+      priceDifference: '0.00',
+      lines: [
+        { material: '36.75', goods: '14.59' },
+        { material: '26.25', goods: '10.42' },
+      ],
+    });
     expect(body.purchaseOrder.lines[0]).toMatchObject({
       ...{ fixedPrice: '25.01', paid: '25.01', priceDifference: '0.00' },
       over: { areaMm2: '0' },
@@ -219,6 +222,7 @@ describe('what comes back', () => {
     const order = await sent(dyeing());
     const { body } = await receive(order, { lots: [back(order, 24, { cost: '40.00' })] });
     expect(body.purchaseOrder.lines[0]).toMatchObject({ priceDifference: '4.00' });
+    expect(body.receipt).toMatchObject({ priceDifference: '4.00' });
     const { id, version, lines } = body.receipt;
     const goods = [{ receiptLineId: lines[0].id, goods: '38.00' }];
     await owner().patch(`/api/receipts/${id}`).set('If-Match', `"${version}"`).send({ goods });

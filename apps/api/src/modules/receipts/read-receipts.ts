@@ -5,6 +5,7 @@ import { unscaled } from '../../db/columns/scaled-decimal.ts';
 import { when, whereAll } from '../../db/sql-conditions.ts';
 import { moneyText } from '../../http/decimal-text.ts';
 import { notFound } from '../../http/problem.ts';
+import { answerTo, readAnswers, type AnswerRow } from './read-answers.ts';
 import { whyCostStays, type MovedSince } from './why-cost-stays.ts';
 
 interface Asked {
@@ -26,6 +27,7 @@ interface Row {
   freight: number;
   duty: number;
   shared_by: ReceiptReply['sharedBy'];
+  price_difference: number;
   version: number;
 }
 
@@ -61,14 +63,14 @@ export async function readReceiptList(em: EntityManager, asked: Asked): Promise<
      ${where} ORDER BY r.id DESC LIMIT ?`,
     [...values, asked.limit ?? 1],
   );
-  const lines = await readLines(
-    em,
-    rows.map((row) => row.id),
-  );
+  const ids = rows.map((row) => row.id);
+  const lines = await readLines(em, ids);
+  const answers = await readAnswers(em, ids);
   return rows.map((row) =>
     toReply(
       row,
       lines.filter((line) => line.receipt_id === row.id),
+      answers.filter((answer) => answer.receipt_id === row.id),
     ),
   );
 }
@@ -107,7 +109,7 @@ async function readLines(em: EntityManager, receiptIds: number[]): Promise<LineR
   );
 }
 
-function toReply(row: Row, lines: LineRow[]): ReceiptReply {
+function toReply(row: Row, lines: LineRow[], answers: AnswerRow[]): ReceiptReply {
   const tolerancePercent = unscaled(row.tolerance_percent, 4).toString();
   return {
     id: row.id,
@@ -121,6 +123,9 @@ function toReply(row: Row, lines: LineRow[]): ReceiptReply {
     duty: moneyText(unscaled(row.duty, 2)),
     sharedBy: row.shared_by,
     staysBecause: whyCostStays(lines),
+    priceDifference: moneyText(unscaled(row.price_difference, 2)),
+    letStand: answerTo('price', answers),
+    notClaimed: answerTo('short', answers),
     lines: lines.map((line) => toLine(line, tolerancePercent)),
     version: row.version,
   };

@@ -1,6 +1,6 @@
 import { Entity, OptionalProps, PrimaryKey, Property } from '@mikro-orm/core';
 import type { Decimal } from 'decimal.js';
-import { MoneyType, PercentType } from '../../db/columns/columns.ts';
+import { AreaType, MoneyType, PercentType } from '../../db/columns/columns.ts';
 
 /** One delivery that was taken in. */
 @Entity({ tableName: 'receipt' })
@@ -32,6 +32,14 @@ export class Receipt {
   /** How far a side might miss its mark when it came. */
   @Property({ type: PercentType })
   tolerancePercent!: Decimal;
+
+  /** How much more its goods cost than at their order's prices. */
+  @Property({ type: MoneyType })
+  priceDifference!: Decimal;
+
+  /** What its lots miss of their marks, of those that miss more than the tolerance. */
+  @Property({ type: AreaType })
+  missingAreaMm2!: Decimal;
 
   @Property({ type: 'integer', columnType: 'integer', nullable: true })
   actorId: number | null = null;

@@ -1,5 +1,6 @@
 import { Router } from 'express';
 import {
+  answerDelivery as answerEndpoint,
   changeReceipt,
   listReceipts,
   readReceipt,
@@ -11,8 +12,11 @@ import { describeReceipt, receiveDelivery } from '../../flows/receive-delivery.t
 import { requireVersion } from '../../http/conditions.ts';
 import { readCursor, toPage } from '../../http/paging.ts';
 import { serve } from '../../http/serve.ts';
+import type { Work } from '../../work.ts';
+import { answerDelivery } from './answer-delivery.ts';
 import { findReceipt } from './find-receipt.ts';
 import { readOneReceipt, readReceiptList } from './read-receipts.ts';
+import type { Receipt } from './receipt.entity.ts';
 
 export function receiptRoutes(context: Context): Router {
   const router = Router();
@@ -34,12 +38,24 @@ export function receiptRoutes(context: Context): Router {
   );
 
   serve(router, context, changeReceipt, async (work, { params, body, ifMatch }) => {
-    const receipt = await findReceipt(work.em, params.id);
-    const { id, version } = receipt;
-    await requireVersion(work.em, { kind: 'delivery', id, version }, ifMatch);
+    const receipt = await receiptAsRead(work, params.id, ifMatch);
     await correctReceipt(work, receipt, body);
     return readOneReceipt(work.em, receipt.id);
   });
 
+  serve(router, context, answerEndpoint, async (work, { params, body, ifMatch }) => {
+    const receipt = await receiptAsRead(work, params.id, ifMatch);
+    await answerDelivery(work, receipt, body);
+    return readOneReceipt(work.em, receipt.id);
+  });
+
   return router;
+}
+
+/** @throws {Problem} 404, 412 when somebody changed it meanwhile */
+async function receiptAsRead(work: Work, id: number, ifMatch: number): Promise<Receipt> {
+  const receipt = await findReceipt(work.em, id);
+  const { version } = receipt;
+  await requireVersion(work.em, { kind: 'delivery', id, version }, ifMatch);
+  return receipt;
 }

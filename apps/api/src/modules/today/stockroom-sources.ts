@@ -1,3 +1,5 @@
+import { unscaled } from '../../db/columns/scaled-decimal.ts';
+import { moneyText } from '../../http/decimal-text.ts';
 import { by, type Source } from './to-do-source.ts';
 
 /** What is being counted, for whoever counts. */
@@ -59,21 +61,25 @@ export const draftOrders: Source = {
   }),
 };
 
+/** What the owner said to a delivery holds for what was missing, or for the difference of price, when it was said. */
+const unanswered = (answered: 'missing_area_mm2' | 'price_difference') => `NOT EXISTS
+  (SELECT 1 FROM delivery_answer a WHERE a.receipt_id = r.id AND a.${answered} = r.${answered})`;
+
 /**
  * Orders of which lots came short of their mark beyond the tolerance of their delivery, as `compareArea` judges it, until
- * each is claimed and its claim is credited or given up. What nobody claims within 30 days is let be.
+ * each delivery is answered, or claimed and its claim credited or given up. A claim is of all that is short in a delivery.
  */
 export const shortOfMark: Source = {
   roles: ['owner'],
   sql: `SELECT p.id, p.number, '' AS title, s.name AS customer, MIN(r.received_on) AS day,
-      SUM(c.id IS NULL) || ' ' || COUNT(c.id) AS extra
-    FROM receipt_line l JOIN receipt r ON r.id = l.receipt_id
+      SUM(w.claimed = 0) || ' ' || SUM(w.claimed) AS extra
+    FROM (SELECT r.id, 0 AS claimed FROM receipt r WHERE r.missing_area_mm2 > 0 AND ${unanswered('missing_area_mm2')}
+        AND NOT EXISTS (SELECT 1 FROM supplier_claim c WHERE c.receipt_id = r.id)
+      UNION ALL SELECT receipt_id, 1 FROM supplier_claim WHERE state = 'open' AND receipt_id IS NOT NULL) w
+      JOIN receipt r ON r.id = w.id JOIN receipt_line l ON l.receipt_id = r.id
       JOIN purchase_order p ON p.id = r.purchase_order_id JOIN supplier s ON s.id = p.supplier_id
-      LEFT JOIN claimed_lot k ON k.receipt_line_id = l.id LEFT JOIN supplier_claim c ON c.id = k.supplier_claim_id
-    WHERE l.lot_id IS NOT NULL
-      AND (l.marked_area_mm2 - l.quantity) * 1000000 > r.tolerance_percent * l.marked_area_mm2
-      AND (c.state = 'open' OR (c.id IS NULL AND r.received_on >= date(:today, '-30 days')))
-    GROUP BY p.id ORDER BY SUM(c.id IS NULL) = 0, day, p.id LIMIT 3`,
+    WHERE (l.marked_area_mm2 - l.quantity) * 1000000 > r.tolerance_percent * l.marked_area_mm2
+    GROUP BY p.id ORDER BY SUM(w.claimed = 0) = 0, day, p.id LIMIT 3`,
   say: (row) => {
     const [unclaimed = 0, claimed = 0] = (row.extra ?? '').split(' ').map(Number);
     return {
@@ -105,6 +111,34 @@ export const sentBack: Source = {
     to: `/stockroom/purchase-orders/${row.id}`,
   }),
 };
+
+/** Orders of which what came cost other than was ordered, until the owner lets it stand. */
+export const notAtItsPrice: Source = {
+  roles: ['owner'],
+  sql: `SELECT p.id, p.number, '' AS title, s.name AS customer, MIN(r.received_on) AS day,
+      COUNT(*) || ' ' || SUM(r.price_difference) AS extra
+    FROM receipt r JOIN purchase_order p ON p.id = r.purchase_order_id JOIN supplier s ON s.id = p.supplier_id
+    WHERE r.price_difference <> 0 AND ${unanswered('price_difference')}
+    GROUP BY p.id ORDER BY day, p.id LIMIT 3`,
+  say: (row) => {
+    const [deliveries = 0, difference = 0] = (row.extra ?? '').split(' ').map(Number);
+    return {
+      kind: 'price',
+      title: 'Not at its price',
+      detail:
+        deliveries === 1
+          ? `${row.number} from ${row.customer} cost ${differenceWords(difference)} than ordered`
+          : `${deliveries} deliveries of ${row.number} from ${row.customer} did not cost what was ordered`,
+      when: by('received', row.day),
+      late: false,
+      action: 'Look',
+      to: `/stockroom/purchase-orders/${row.id}`,
+    };
+  },
+};
+
+const differenceWords = (hundredths: number) =>
+  `${moneyText(unscaled(Math.abs(hundredths), 2))} ${hundredths > 0 ? 'more' : 'less'}`;
 
 function claimWords(unclaimed: number, claimed: number): string {
   const lots = (count: number) => (count === 1 ? '1 lot' : `${count} lots`);

@@ -174,14 +174,27 @@ describe('an order to a supplier', () => {
       .post('/api/receipts')
       .send({
         purchaseOrderId: order.id,
-        hardware: [{ ...rivets, quantity: 1000, cost: '170.00' }],
+        hardware: [{ ...rivets, quantity: 600, cost: '105.00' }],
+        receivedOn: '2026-01-30',
       })
       .expect(201);
+    const to = `/stockroom/purchase-orders/${order.id}`;
     expect(await toDos('owner', 'price')).toMatchObject([
       {
         detail: expect.stringContaining('cost 7.50 more than ordered'),
-        to: `/stockroom/purchase-orders/${order.id}`,
+        when: { word: 'received', day: '2026-01-30' },
+        to,
       },
+    ]);
+    await owner()
+      .post('/api/receipts')
+      .send({
+        purchaseOrderId: order.id,
+        hardware: [{ ...rivets, quantity: 400, cost: '57.50' }],
+      })
+      .expect(201);
+    expect(await toDos('owner', 'price')).toMatchObject([
+      { detail: expect.stringMatching(/^2 deliveries of P-.* did not cost what was ordered$/), to },
     ]);
     expect(await toDos('maker', 'price')).toEqual([]);
   });

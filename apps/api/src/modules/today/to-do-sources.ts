@@ -1,6 +1,7 @@
 import {
   draftOrders,
   handedInCounts,
+  notAtItsPrice,
   openCounts,
   sentBack,
   shortOfMark,
@@ -191,6 +192,7 @@ export const sources: Source[] = [
       to: `/pattern-room/tooling/${row.id}`,
     }),
   },
+  notAtItsPrice,
   {
     roles: ['bookkeeper'],
     sql: `SELECT 0 AS id, '' AS number, '' AS title, '' AS customer,

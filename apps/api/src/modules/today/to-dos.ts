@@ -1,6 +1,5 @@
 import type { ToDo } from '@hidewright/contract';
 import type { Work } from '../../work.ts';
-import { priceDifferences } from './price-differences.ts';
 import type { Role, Row } from './to-do-source.ts';
 import { sources } from './to-do-sources.ts';
 
@@ -12,7 +11,6 @@ export async function toDos(work: Work, role: Role): Promise<ToDo[]> {
     const rows = await work.em.execute<Row[]>(sql, bindings);
     all.push(...rows.map((row) => source.say(row, work.today)));
   }
-  if (role === 'owner') all.push(...(await priceDifferences(work)));
   if (all.length === 0 && role === 'owner') return firstSteps(work);
   return [...all.filter((toDo) => toDo.late), ...all.filter((toDo) => !toDo.late)];
 }

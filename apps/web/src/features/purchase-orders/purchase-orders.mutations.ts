@@ -1,5 +1,6 @@
 import {
   addPurchaseOrder,
+  answerDelivery,
   cancelPurchaseOrder,
   changeAwaitedDay,
   changePurchaseOrder,
@@ -29,6 +30,8 @@ export const useCloseLine = () => useSend(closePurchaseLine);
 export const useReopenPurchaseOrder = () => useSend(reopenPurchaseOrder);
 
 export const useChangeReceipt = () => useSend(changeReceipt);
+
+export const useAnswerDelivery = () => useSend(answerDelivery);
 
 export const useOpenClaim = () => useSend(openClaim);
 

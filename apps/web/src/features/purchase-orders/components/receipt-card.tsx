@@ -2,12 +2,12 @@ import type { PurchaseOrder, Receipt } from '@hidewright/contract';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
-import { Notice } from '../../../components/notice.tsx';
-import { dayText, moneyText, percentText } from '../../../lib/formatting.ts';
+import { dayText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { ClaimDialog } from './claim-dialog.tsx';
+import { PriceNotice } from './price-notice.tsx';
 import { ReceiptCostsDialog } from './receipt-costs-dialog.tsx';
 import { ReceiptLinesTable } from './receipt-lines-table.tsx';
+import { ShortNotice } from './short-notice.tsx';
 
 const sharedWords = { value: 'by value', area: 'by area', count: 'by count' };
 
@@ -18,12 +18,10 @@ interface ReceiptCardProps {
   isOwner: boolean;
 }
 
-/** One delivery: what came, what it cost to bring, and what is short of its mark. */
+/** One delivery: what came, what it cost, and what of it is other than was marked or ordered. */
 export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
   const { today } = useWorkshop();
-  const [asking, setAsking] = useState<'costs' | 'claim'>();
-  const close = () => setAsking(undefined);
-  const short = receipt.lines.filter((line) => line.marked?.short && line.claimId === null);
+  const [correcting, setCorrecting] = useState(false);
   const { freight, duty } = receipt;
   const day = dayText(receipt.receivedOn, today);
   const title = of ? `Delivery ${of.count}, ${day}` : `${day}: ${whatCame(receipt)}`;
@@ -34,32 +32,12 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
       aside={
         isOwner &&
         receipt.staysBecause === null && (
-          <Button onClick={() => setAsking('costs')}>Put right what it cost</Button>
+          <Button onClick={() => setCorrecting(true)}>Put right what it cost</Button>
         )
       }
     >
-      {short.length > 0 && (
-        <Notice
-          tone="attention"
-          className="mb-4"
-          title={
-            short.length === 1
-              ? 'One lot is short of its mark.'
-              : `${short.length} lots are short of their mark.`
-          }
-          actions={
-            isOwner &&
-            of && (
-              <Button tone="primary" onClick={() => setAsking('claim')}>
-                Claim it
-              </Button>
-            )
-          }
-        >
-          {short.map((line) => line.lotTag).join(', ')}: more than{' '}
-          {percentText(receipt.tolerancePercent)} smaller than marked.
-        </Notice>
-      )}
+      <ShortNotice receipt={receipt} order={of?.order} isOwner={isOwner} />
+      <PriceNotice receipt={receipt} isOwner={isOwner} />
       <ReceiptLinesTable receipt={receipt} label={`What came: ${title}`} />
       {freight !== undefined && duty !== undefined && (
         <Carriage freight={freight} duty={duty} sharedBy={sharedWords[receipt.sharedBy]} />
@@ -67,10 +45,7 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
       {isOwner && receipt.staysBecause !== null && (
         <p className="mt-1 max-w-prose text-sm text-ink-soft">{receipt.staysBecause}</p>
       )}
-      {asking === 'costs' && <ReceiptCostsDialog receipt={receipt} onClose={close} />}
-      {asking === 'claim' && of && (
-        <ClaimDialog order={of.order} receipt={receipt} onClose={close} />
-      )}
+      {correcting && <ReceiptCostsDialog receipt={receipt} onClose={() => setCorrecting(false)} />}
     </Card>
   );
 }
