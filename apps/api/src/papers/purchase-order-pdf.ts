@@ -29,7 +29,8 @@ export interface PurchaseOrderPaper {
     articleNumber: string;
     /** With its unit: "40 ft²", "1,000"; "5 sides, about 110 ft²". */
     quantity: string;
-    unitPrice: string;
+    /** Null where it is not known: the supplier is asked for it. */
+    unitPrice: string | null;
     /** "per ft²", "each" or "for the lot" */
     per: string;
     amount: string;
@@ -131,8 +132,12 @@ function cellsOf(line: PurchaseOrderPaper['lines'][number], digits: number): Cel
       .filter(Boolean)
       .join('\n'),
     quantity: line.quantity,
-    price: `${printedNumber(line.unitPrice, digits)} ${line.per}`,
-    amount: printedNumber(line.amount, digits),
+    ...(line.unitPrice === null
+      ? { price: 'please tell us', amount: '' }
+      : {
+          price: `${printedNumber(line.unitPrice, digits)} ${line.per}`,
+          amount: printedNumber(line.amount, digits),
+        }),
   };
 }
 

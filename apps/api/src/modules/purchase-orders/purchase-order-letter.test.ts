@@ -72,6 +72,14 @@ it('says the price of leather for the unit in which its area is said', () => {
   expect(body).toContain('230.4 dm², to become Fen Veg black, at USD 0.1776 per dm²');
 });
 
+it('asks for a price that is not known, and adds up without it', () => {
+  const unpriced = { ...rivets, unitPrice: '0.00' };
+  expect(letterFor([unpriced, russet], { total: '935.00' })).toMatch(
+    /- 1,500 × Rivets, please tell us its price\n[^]*Together USD 935\.00, before carriage and tax, without what you are to tell us the price of\./,
+  );
+  expect(letterFor([unpriced], { total: '0.00' })).not.toContain('Together');
+});
+
 it('says figures and days as they are said everywhere else', () => {
   const leather = { ...russet, whole: null, areaMm2: '232257600' };
   const body = letterFor([leather, rivets], { total: '21505.00', expectedOn: '2026-12-14' });

@@ -3,7 +3,9 @@ import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { sayDay } from '../../say-day.ts';
 import { areaPriceOf, sayArea } from '../stock/say-area.ts';
+
 import { sayOrderedArea } from './ordered-area.ts';
+import { isUnpriced } from './unpriced.ts';
 
 interface Sender {
   name: string;
@@ -21,7 +23,7 @@ export function purchaseOrderLetter(
     'Good day,',
     asking(order),
     order.lines.map((line) => sayLine(line, from)).join('\n'),
-    `Together ${from.currency} ${figureWords(order.total ?? '')}, before carriage and tax.`,
+    sayTotal(order, from.currency),
     order.expectedOn === null
       ? ''
       : `We count on it by ${sayDay(order.expectedOn)}. Please tell us if it will be later.`,
@@ -45,11 +47,23 @@ function asking({ number, lines }: PurchaseOrder): string {
   return `Please send us, and do for us, on our order ${number}:`;
 }
 
+/** Where no price is known there is nothing to add up. */
+function sayTotal({ lines, total = '' }: PurchaseOrder, currency: string): string {
+  if (lines.every(isUnpriced)) return '';
+  const without = lines.some(isUnpriced) ? ', without what you are to tell us the price of' : '';
+  return `Together ${currency} ${figureWords(total)}, before carriage and tax${without}.`;
+}
+
 function sayLine(line: PurchaseLine, { areaUnit, currency }: Sender): string {
   if (line.service !== null) return sayWork(line, line.service, { areaUnit, currency });
-  if (line.areaMm2 === null) return sayCounted(line, `${currency} ${line.unitPrice ?? ''}`);
-  const price = sayAreaPrice(line, { areaUnit, currency });
-  return `- ${sayOrderedArea(line, areaUnit)} of ${nameAndArticle(line)}, at ${price}`;
+  const [much, price] =
+    line.areaMm2 === null
+      ? [sayCount(line), sayPriceOfOne(line, currency)]
+      : [
+          `${sayOrderedArea(line, areaUnit)} of`,
+          `at ${sayAreaPrice(line, { areaUnit, currency })}`,
+        ];
+  return `- ${much} ${nameAndArticle(line)}, ${isUnpriced(line) ? 'please tell us its price' : price}`;
 }
 
 /** USD 9.50 per ft² */
@@ -62,12 +76,14 @@ function sayAreaPrice(
 }
 
 /** - 1,500 × Rivets 7 mm, at USD 0.11 each; - 250 ml of Edge dye, at USD 0.04 per ml */
-function sayCounted(line: PurchaseLine, price: string): string {
-  const [count, unit] = [line.quantity ?? 0, line.unit ?? 'piece'];
-  const counted = countedWords(count, unit);
-  return unit === 'piece'
-    ? `- ${counted} × ${nameAndArticle(line)}, at ${price} each`
-    : `- ${counted} of ${nameAndArticle(line)}, at ${price} per ${unitWord(unit)}`;
+function sayCount({ quantity, unit }: PurchaseLine): string {
+  const counted = countedWords(quantity ?? 0, unit ?? 'piece');
+  return (unit ?? 'piece') === 'piece' ? `${counted} ×` : `${counted} of`;
+}
+
+function sayPriceOfOne({ unitPrice, unit }: PurchaseLine, currency: string): string {
+  const one = (unit ?? 'piece') === 'piece' ? 'each' : `per ${unitWord(unit ?? 'piece')}`;
+  return `at ${currency} ${unitPrice ?? ''} ${one}`;
 }
 
 const nameAndArticle = ({ name, articleNumber }: PurchaseLine): string =>

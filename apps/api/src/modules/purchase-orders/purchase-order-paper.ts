@@ -4,10 +4,12 @@ import { dayIn } from '../../day-in.ts';
 import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
 import type { Work } from '../../work.ts';
 import { areaPriceOf } from '../stock/say-area.ts';
+
 import { Workshop } from '../workshop/workshop.entity.ts';
 import { sayOrderedArea } from './ordered-area.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
 import { readOnePurchaseOrder } from './read-purchase-orders.ts';
+import { isUnpriced } from './unpriced.ts';
 
 /** What goes on paper for an order as it is now; a draft as it would be if it were sent today. */
 export async function paperOf(work: Work, order: PurchaseOrder): Promise<PurchaseOrderPaper> {
@@ -51,6 +53,7 @@ function printedLine(
         : sayOrderedArea(line, areaUnit),
     ...(areaMm2 === null ? { unitPrice, per: perWord(unit) } : areaPriceOf(unitPrice, areaUnit)),
     amount,
+    ...(isUnpriced(line) && { unitPrice: null }),
     ...(line.service !== null && workOf(line, line.service, areaUnit)),
   };
 }
