@@ -87,6 +87,9 @@ test('a maker counts bins blind on a phone, and the owner approves', async () =>
   await scanner.fill('4006381333931');
   await page.keyboard.press('Enter');
   await page.getByText('“4006381333931” is on no lot, bin, order or ticket here.').waitFor();
+  await scanner.fill(`https://example.com/${'x'.repeat(60)}`);
+  await page.keyboard.press('Enter');
+  await page.getByText('That is no tag of this workshop.').waitFor();
   // The beginning of a wrong figure is a figure: it is not sent, and the sheet is not handed in over it.
   await field.fill('');
   await field.pressSequentially('12.5');
