@@ -54,7 +54,7 @@ interface PricedRow {
 function pricedRows(em: Work['em'], ids: readonly number[]): Promise<PricedRow[]> {
   return em.execute<PricedRow[]>(
     `WITH named (id) AS (SELECT DISTINCT value FROM json_each(?))
-    SELECT h.id, h.name, h.unit_price, h.price_from_parts,
+    SELECT h.id, h.name, iif(h.from_customer, 0, h.unit_price) AS unit_price, h.price_from_parts,
       (SELECT json_group_array(json_array(k.hardware_id, k.quantity) ORDER BY k.id) FROM kit_part k
         WHERE k.kit_id = h.id AND h.id IN (SELECT id FROM named)) AS parts
     FROM hardware h
