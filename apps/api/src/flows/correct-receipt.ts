@@ -4,6 +4,7 @@ import { unscaled } from '../db/columns/scaled-decimal.ts';
 import { moneyText } from '../http/decimal-text.ts';
 import { invalid, wrongState } from '../http/problem.ts';
 import { logDeed } from '../modules/activity/activity-log.ts';
+import { Hardware } from '../modules/hardware/hardware.entity.ts';
 import { findLot } from '../modules/lots/find-lot.ts';
 import { priceDifferenceOf } from '../modules/purchase-orders/paid-for-lines.ts';
 import { raiseVersion } from '../modules/receipts/raise-version.ts';
@@ -13,7 +14,7 @@ import type { Receipt } from '../modules/receipts/receipt.entity.ts';
 import { receiveStock, undoReceipt } from '../modules/stock/stock-ledger.ts';
 import { sayDay } from '../say-day.ts';
 import type { Work } from '../work.ts';
-import { carriageOf } from './receive/price-delivery.ts';
+import { carriageOf, requireNoCost } from './receive/price-delivery.ts';
 import { cameWith } from './receive/put-on-rack.ts';
 
 type Correction = BodyOf<typeof changeReceipt>;
@@ -37,12 +38,18 @@ export async function correctReceipt(
     { orderBy: { position: 'asc' } },
   );
   for (const line of [...lines].reverse()) await takeOut(work, receipt, line);
-  for (const { receiptLineId, goods } of typed.goods ?? [])
-    lineOf(lines, receiptLineId).goods = new Decimal(goods);
+  const theirs = await readTheirs(work, lines);
+  for (const [at, { receiptLineId, goods }] of (typed.goods ?? []).entries()) {
+    const line = lineOf(lines, receiptLineId);
+    const brought = theirs.get(line.hardwareId);
+    const same = line.goods.equals(goods);
+    if (brought && !same) requireNoCost(brought, goods, `goods.${at}.goods`);
+    line.goods = new Decimal(goods);
+  }
   if (typed.freight !== undefined) receipt.freight = new Decimal(typed.freight);
   if (typed.duty !== undefined) receipt.duty = new Decimal(typed.duty);
   if (typed.sharedBy !== undefined) receipt.sharedBy = typed.sharedBy;
-  shareOut(receipt, lines);
+  shareOut(receipt, lines, theirs);
   for (const line of lines) await putBack(work, receipt, line);
   receipt.priceDifference = await priceDifferenceOf(work.em, lines);
   await raiseVersion(work, receipt, readVersion);
@@ -75,11 +82,20 @@ async function takeOut(work: Work, { purchaseOrderId }: Receipt, line: ReceiptLi
   await undoReceipt(work, { ...itemOf(line), quantity, value, purchaseOrderId, reason });
 }
 
-function shareOut(receipt: Receipt, lines: ReceiptLine[]): void {
-  const carried = lines.map(({ goods, lotId, quantity }) => ({
-    goods: moneyText(goods),
+type Theirs = ReadonlyMap<number | null, Hardware>;
+
+/** The hardware among the lines that the customer brings. */
+async function readTheirs({ em }: Work, lines: ReceiptLine[]): Promise<Theirs> {
+  const ids = lines.flatMap(({ hardwareId }) => hardwareId ?? []);
+  const brought = await em.find(Hardware, { id: { $in: ids }, fromCustomer: true });
+  return new Map(brought.map((hardware) => [hardware.id, hardware]));
+}
+
+function shareOut(receipt: Receipt, lines: ReceiptLine[], theirs: Theirs): void {
+  const carried = lines.map(({ goods, lotId, hardwareId, quantity }) => ({
+    goods: theirs.has(hardwareId) ? '0' : moneyText(goods),
     areaMm2: lotId === null ? null : unscaled(quantity, 3).toFixed(),
-    quantity: lotId === null ? quantity : null,
+    quantity: lotId === null && !theirs.has(hardwareId) ? quantity : null,
   }));
   const shares = carriageOf(carried, {
     freight: moneyText(receipt.freight),

@@ -25,10 +25,12 @@ export async function hardwareKinds(
       swaps.flatMap(({ byHardwareId }) => (byHardwareId === null ? [] : [byHardwareId])),
     ),
   ]);
-  const rows = await kindsWithParts<PricedRow>(em, ids, ['name', 'unit_price', 'price_from_parts']);
+  const columns = ['name', 'unit_price', 'price_from_parts', 'from_customer'];
+  const rows = await kindsWithParts<PricedRow>(em, ids, columns);
   const plain = (row: PricedRow) => ({
     name: row.name,
-    unitPrice: priceText(unscaled(row.unit_price, 4)),
+    // What the customer brings costs nothing, whatever it once cost.
+    unitPrice: priceText(unscaled(row.from_customer === 1 ? 0 : row.unit_price, 4)),
   });
   const byId = new Map(rows.map((row) => [row.id, row]));
   return new Map(
@@ -47,6 +49,7 @@ interface PricedRow extends WithParts {
   name: string;
   unit_price: number;
   price_from_parts: number;
+  from_customer: number;
 }
 
 function pricedIn(

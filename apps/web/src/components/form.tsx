@@ -36,6 +36,11 @@ export interface FormProps<Schema extends BodySchema> {
 
 /** One column of fields, checked by the contract here and by the API there, with the same sentences. */
 export function Form<Schema extends BodySchema>(props: FormProps<Schema>) {
+  // Another draft is another form: nothing typed into this one may show there.
+  return <TypedForm key={props.draftKey} {...props} />;
+}
+
+function TypedForm<Schema extends BodySchema>(props: FormProps<Schema>) {
   const { schema, defaults, onSend, draftKey, children } = props;
   if (!schema) throw new Error('This endpoint takes no body, so it has no form');
   const id = useId();

@@ -10,6 +10,13 @@ export function readDraft(key: string): Record<string, unknown> | undefined {
   }
 }
 
+/** What was typed belongs to what the address began the form with: the item, the order, the customer. */
+export function draftKeyAt(form: string, search: URLSearchParams): string {
+  const asked = new URLSearchParams(search);
+  asked.sort();
+  return asked.size === 0 ? form : `${form}-${asked}`;
+}
+
 export function writeDraft(key: string, values: unknown): void {
   try {
     sessionStorage.setItem(prefix + key, JSON.stringify(values));

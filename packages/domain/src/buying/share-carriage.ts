@@ -11,7 +11,7 @@ export interface CarriedLine {
   goods: DecimalText;
   /** of leather, above 0; null of hardware */
   areaMm2: DecimalText | null;
-  /** of hardware, above 0; null of leather */
+  /** of hardware, above 0; null of leather, and of what the customer brought, which bears nothing */
   quantity: number | null;
 }
 
@@ -20,6 +20,9 @@ const refusals: Record<CarriageBasis, string> = {
   area: 'No leather came: share the carriage by value or by count instead.',
   count: 'No hardware came: share the carriage by value or by area instead.',
 };
+
+const allTheirs =
+  'The customer brought all that came, which costs nothing: leave freight and duty at 0.';
 
 /**
  * What each line of a delivery bears of an amount that was paid for all of it, such as freight or
@@ -33,6 +36,8 @@ export function shareCarriage(
   by: CarriageBasis,
 ): DecimalText[] {
   if (readDecimal(amount, 'amount', { places: 2, min: 0 }).isZero()) return lines.map(() => '0.00');
+  if (lines.every(({ areaMm2, quantity }) => areaMm2 === null && quantity === null))
+    throw new InvalidInput('sharedBy', allTheirs);
   const weights = lines.map((line) => weightOf(line, by));
   if (weights.every((weight) => readDecimal(weight, 'goods', { min: 0 }).isZero()))
     throw new InvalidInput('sharedBy', refusals[by]);

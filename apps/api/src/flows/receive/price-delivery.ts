@@ -77,13 +77,32 @@ export async function priceHardware(
   }
   const { quantity, batch } = typed;
   const line = delivery.fill(typed, quantity, field);
-  const goods =
-    typed.cost === null
-      ? hardwareCost(quantity, line?.unitPrice ?? hardware.unitPrice, `${field}.cost`)
-      : new Decimal(typed.cost);
+  const goods = goodsOf(hardware, typed, { field: `${field}.cost`, ordered: line?.unitPrice });
   const purchaseLineId = line?.id ?? null;
   const priced = { field, purchaseLineId, quantity, markedAreaMm2: null, batch, goods, material };
   return { of: 'hardware', hardware, ...priced };
+}
+
+function goodsOf(
+  hardware: Hardware,
+  { quantity, cost }: ReceivedHardware,
+  { field, ordered }: { field: string; ordered: Decimal | undefined },
+): Decimal {
+  if (hardware.fromCustomer) {
+    requireNoCost(hardware, cost, field);
+    return new Decimal(0);
+  }
+  if (cost !== null) return new Decimal(cost);
+  return hardwareCost(quantity, ordered ?? hardware.unitPrice, field);
+}
+
+/**
+ * What the customer brings has no value in stock.
+ * @throws {Problem} 422 where it is said to have cost something
+ */
+export function requireNoCost({ name }: Hardware, cost: string | null, field: string): void {
+  if (cost === null || new Decimal(cost).isZero()) return;
+  throw invalid([{ field, message: `The customer brings ${name}: leave its cost empty.` }]);
 }
 
 interface Carriage {
@@ -111,7 +130,7 @@ export function withCarriage(lines: PricedLine[], carriage: Carriage): LandedLin
   const carried = lines.map((line) => ({
     goods: moneyText(line.goods),
     areaMm2: line.of === 'lot' ? line.typed.measuredAreaMm2 : null,
-    quantity: line.of === 'lot' ? null : line.quantity,
+    quantity: line.of === 'lot' || line.hardware.fromCustomer ? null : line.quantity,
   }));
   const shares = carriageOf(carried, carriage);
   return lines.map((line, at) => ({ ...line, carriage: shares[at] ?? new Decimal(0) }));

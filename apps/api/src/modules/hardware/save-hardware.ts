@@ -21,7 +21,7 @@ export async function createHardware(
   const hardware = work.em.create(Hardware, {
     ...plain,
     ...decimals({ postLengthMm, stackMinMm, stackMaxMm }),
-    unitPrice: new Decimal(unitPrice),
+    unitPrice: new Decimal(body.fromCustomer ? 0 : unitPrice),
   });
   requireStack(hardware);
   await work.em.flush();
@@ -44,6 +44,7 @@ export async function updateHardware(
     ...plain,
     ...decimals({ unitPrice, postLengthMm, stackMinMm, stackMaxMm }),
   });
+  if (hardware.fromCustomer) hardware.unitPrice = new Decimal(0);
   requireStack(hardware);
   await work.em.flush();
   if (parts !== undefined) await saveParts(work, hardware, parts);

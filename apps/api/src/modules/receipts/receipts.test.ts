@@ -130,6 +130,47 @@ describe('freight and duty', () => {
   });
 });
 
+describe('what the customer brings', () => {
+  const medals = (more: object = {}) => ({ hardwareId: 0, quantity: 10, ...more });
+  const addMedals = async () => {
+    const medal = { name: `Medal ${things.hardwareId}`, unitPrice: '5', fromCustomer: true };
+    const { body } = await shop.as('owner').post('/api/hardware').send(medal).expect(201);
+    expect(body.unitPrice).toBe('0.00');
+    return body.id as number;
+  };
+  const bring = (body: object) => receive({ purchaseOrderId: null, ...body }, 'owner');
+
+  it('has no value in stock, and bears no freight', async () => {
+    const hardwareId = await addMedals();
+    const theirs = medals({ hardwareId });
+    const ours = { hardwareId: things.hardwareId, quantity: 100 };
+    const { body } = await bring({
+      hardware: [theirs, ours],
+      freight: '8.00',
+      sharedBy: 'count',
+    }).expect(201);
+    expect(body.receipt.lines).toMatchObject([
+      { goods: '0.00', carriage: '0.00' },
+      { carriage: '8.00' },
+    ]);
+    expect(body.hardware[0]).toMatchObject({ onHand: 10, valueOnHand: '0.00' });
+    const { id, version, lines } = body.receipt;
+    const goods = [{ receiptLineId: lines[0].id, goods: '50.00' }];
+    const put = await correct(id, version, { goods }).expect(422);
+    expect(put.body.errors[0].message).toContain('leave its cost empty');
+    const again = await correct(id, version, { freight: '9.00' }).expect(200);
+    expect(again.body.lines).toMatchObject([{ carriage: '0.00' }, { carriage: '9.00' }]);
+  });
+
+  it('takes no cost, and no freight where nothing else came', async () => {
+    const hardwareId = await addMedals();
+    const costly = await bring({ hardware: [medals({ hardwareId, cost: '50' })] }).expect(422);
+    expect(costly.body.errors).toMatchObject([{ field: 'hardware.0.cost' }]);
+    const carried = await bring({ hardware: [medals({ hardwareId })], freight: '5' }).expect(422);
+    expect(carried.body.errors[0].message).toContain('leave freight and duty at 0');
+  });
+});
+
 describe('what a delivery cost, put right', () => {
   it('takes in freight that is known only later, and both can be read in the ledger', async () => {
     const first = await receive({ lots: [side()], hardware: [rivets(400)] }, 'maker').expect(201);

@@ -10,6 +10,7 @@ import { ShelfNote } from '../../../features/finished-pieces/components/shelf-no
 import { QuoteForm, type TypedQuote } from '../../../features/quotes/components/quote-form.tsx';
 import { useCreateQuote } from '../../../features/quotes/quotes.mutations.ts';
 import { patternChoicesQuery, quoteQuery } from '../../../features/quotes/quotes.queries.ts';
+import { draftKeyAt } from '../../../lib/draft.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { customerChoices } from './customer-choices.ts';
 
@@ -45,7 +46,7 @@ export function Component() {
         shelf={(patternId, customerId) => (
           <ShelfNote patternId={patternId} customerId={customerId} />
         )}
-        draftKey="quote-new"
+        draftKey={draftKeyAt('quote-new', search)}
         submitWord="Save the draft"
         cancelTo="/counter/quotes"
         onSend={async (body) => {

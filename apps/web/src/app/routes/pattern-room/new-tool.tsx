@@ -9,6 +9,7 @@ import {
   customerChoicesQuery,
   patternChoicesQuery,
 } from '../../../features/tools/tools.queries.ts';
+import { draftKeyAt } from '../../../lib/draft.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 
 export async function loader() {
@@ -28,6 +29,7 @@ export function Component() {
       <PageHeader title="New tool" />
       <Card>
         <AddToolForm
+          draftKey={draftKeyAt('tool-new', search)}
           patternId={pattern === null ? null : Number(pattern)}
           onAdded={(tool) => {
             say(`${toolTitle(tool)} is ${tool.state}.`);

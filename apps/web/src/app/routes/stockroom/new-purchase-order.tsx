@@ -17,6 +17,7 @@ import {
   type Goods,
   type TypedOrder,
 } from '../../../features/purchase-orders/typed-order.ts';
+import { draftKeyAt } from '../../../lib/draft.ts';
 import { loadOrderBasics, NoSupplier, useOrderBasics } from './order-basics.tsx';
 import { readUsualSupplier } from './usual-supplier.ts';
 
@@ -53,7 +54,7 @@ export function Component() {
           <PurchaseOrderForm
             {...basics}
             defaults={startWith(search, supplierId, basics)}
-            draftKey={`purchase-order-new-${search}`}
+            draftKey={draftKeyAt('purchase-order-new', search)}
             submitWord="Save the draft"
             cancelTo="/stockroom/purchase-orders"
             onSend={async (body) => {

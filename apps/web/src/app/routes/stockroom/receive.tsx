@@ -23,6 +23,7 @@ import {
   blankLot,
   deliveryOf,
 } from '../../../features/receiving/typed-delivery.ts';
+import { draftKeyAt } from '../../../lib/draft.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { choicesOf } from './choices.ts';
@@ -105,6 +106,7 @@ function Receiving({ asked, onReceived }: ReceivingProps) {
     <div className="max-w-3xl">
       <ReceiveForm
         order={order ?? undefined}
+        draftKey={draftKeyAt('receive', search)}
         defaults={order ? deliveryOf(order, today) : directly(search, today)}
         leathers={choicesOf(leathers.items)}
         hardware={choicesOf(hardware.items.filter(({ parts }) => parts.length === 0))}

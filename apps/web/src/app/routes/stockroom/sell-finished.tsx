@@ -23,6 +23,7 @@ import { NoTaxAdvice } from '../../../features/tax-rates/components/no-tax-advic
 import { rateCards, usualRate } from '../../../features/tax-rates/rate-cards.ts';
 import { taxRatesQuery } from '../../../features/tax-rates/tax-rates.queries.ts';
 import { countText } from '../../../lib/formatting.ts';
+import { draftKeyAt } from '../../../lib/draft.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { choicesOf } from './choices.ts';
 
@@ -61,6 +62,7 @@ function Sale({ piece }: { piece: FinishedPiece }) {
       >
         <SellForm
           piece={piece}
+          draftKey={draftKeyAt(`sell-finished-${piece.id}`, search)}
           customers={choices}
           buyer={choices.some(({ value }) => value === asked) ? asked : undefined}
           newCustomer={(onAdded) => <AddCustomerForm brief onAdded={({ id }) => onAdded(id)} />}

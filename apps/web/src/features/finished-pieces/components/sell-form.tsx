@@ -12,6 +12,7 @@ import { RateField, type RateFieldProps } from './rate-field.tsx';
 import { SaleSum } from './sale-sum.tsx';
 
 interface SellFormProps extends RateFieldProps {
+  draftKey: string;
   piece: FinishedPiece;
   customers: readonly Choice[];
   /** Who is chosen to begin with, where nobody's mark decides. */
@@ -39,7 +40,7 @@ export function SellForm(props: SellFormProps) {
       }}
       submitWord="Sell them"
       actions={actions}
-      draftKey={`sell-finished-${id}`}
+      draftKey={props.draftKey}
       onSend={async (body) =>
         onSold(await sell.mutateAsync({ params: { id }, body }), body.quantity)
       }

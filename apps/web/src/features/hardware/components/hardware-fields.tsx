@@ -64,12 +64,13 @@ export function HardwareFields({ suppliers, own }: HardwareFieldsProps) {
   );
 }
 
-/** A kit whose price is that of its parts has none to be typed. */
+/** A kit whose price is that of its parts has none to be typed, nor has what the customer brings. */
 function PriceField({ isKit }: { isKit: boolean }) {
   const { getValues, setValue } = useFormContext();
   const fromParts = useWatch({ name: 'priceFromParts' }) as boolean | undefined;
   const unit = useWatch({ name: 'unit' }) as HardwareUnit | undefined;
-  const hidden = isKit && fromParts === true;
+  const fromCustomer = useWatch({ name: 'fromCustomer' }) as boolean | undefined;
+  const hidden = fromCustomer === true || (isKit && fromParts === true);
   useEffect(() => {
     if (hidden && getValues('unitPrice') === '') setValue('unitPrice', '0');
   }, [hidden, getValues, setValue]);

@@ -12,7 +12,7 @@ import { WorkFields } from './work-fields.tsx';
 /** All of a pattern: on a wide screen the drawing stays beside what is typed, on a phone it follows the measures. */
 export function PatternFields() {
   return (
-    <div className="grid items-start gap-x-10 gap-y-6 lg:grid-cols-[minmax(0,36rem)_minmax(0,1fr)]">
+    <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-x-10 gap-y-6 lg:grid-cols-[minmax(0,36rem)_minmax(0,1fr)]">
       <div className="space-y-5">
         <TextField name="name" label="Name" help="such as Round coaster" />
         <LayoutFields />

@@ -15,6 +15,7 @@ import { ReceivedLotList } from './received-lot-list.tsx';
 
 interface ReceiveFormProps {
   order: PurchaseOrder | undefined;
+  draftKey: string;
   defaults: TypedDelivery;
   leathers: readonly Choice[];
   hardware: readonly Choice[];
@@ -68,7 +69,7 @@ export function ReceiveForm(props: ReceiveFormProps) {
       defaults={defaults}
       submitWord="Put it on the rack"
       submitSize="bench"
-      draftKey={`receive-${order?.id ?? 'without-order'}`}
+      draftKey={props.draftKey}
       onSend={receive}
     >
       {beaten && <LookAgain onLookAgain={props.onLookAgain} onLooked={() => setBeaten(false)} />}

@@ -12,12 +12,13 @@ const kinds = [
 ];
 
 interface AddToolFormProps {
+  draftKey: string;
   /** For which pattern, where it is known already. */
   patternId: number | null;
   onAdded: (tool: ToolReply) => void;
 }
 
-export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
+export function AddToolForm({ draftKey, patternId, onAdded }: AddToolFormProps) {
   const send = useAddTool();
   return (
     <Form
@@ -40,7 +41,7 @@ export function AddToolForm({ patternId, onAdded }: AddToolFormProps) {
         reliefAreaMm2: null,
       }}
       submitWord="Add the tool"
-      draftKey="tool-new"
+      draftKey={draftKey}
       onSend={async (body) =>
         onAdded(await send.mutateAsync({ body: ofItsOwner(ofItsKind(body)) }))
       }
