@@ -110,6 +110,7 @@ function Receiving({ asked, onReceived }: ReceivingProps) {
         defaults={order ? deliveryOf(order, today) : directly(search, today)}
         leathers={choicesOf(leathers.items)}
         hardware={choicesOf(hardware.items.filter(({ parts }) => parts.length === 0))}
+        fromCustomer={hardware.items.flatMap((each) => (each.fromCustomer ? each.id : []))}
         tolerancePercent={workshop.areaTolerancePercent}
         mayPrice={isOwner}
         onReceived={onReceived}

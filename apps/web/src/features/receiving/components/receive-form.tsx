@@ -19,6 +19,8 @@ interface ReceiveFormProps {
   defaults: TypedDelivery;
   leathers: readonly Choice[];
   hardware: readonly Choice[];
+  /** The hardware that customers bring, which costs nothing. */
+  fromCustomer: readonly number[];
   /** How far a side may miss its mark, in per cent. */
   tolerancePercent: string;
   /** Whether the person may say what it cost. */
@@ -60,7 +62,13 @@ export function ReceiveForm(props: ReceiveFormProps) {
     />
   );
   const hardwareList = (
-    <ReceivedHardwareList key="hardware" lines={lines} hardware={hardware} mayPrice={mayPrice} />
+    <ReceivedHardwareList
+      key="hardware"
+      lines={lines}
+      hardware={hardware}
+      fromCustomer={props.fromCustomer}
+      mayPrice={mayPrice}
+    />
   );
 
   return (

@@ -1,7 +1,8 @@
 import type { PurchaseLine } from '@hidewright/contract';
 import { countedWords, unitWord } from '@hidewright/domain';
 import { Plus } from 'lucide-react';
-import { useFieldArray, useFormContext } from 'react-hook-form';
+import { useEffect } from 'react';
+import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { MoneyField } from '../../../components/money-field.tsx';
 import { NumberField } from '../../../components/number-field.tsx';
@@ -14,11 +15,14 @@ import { blankHardware, isOpen, type TypedHardware } from '../typed-delivery.ts'
 interface ReceivedHardwareListProps {
   lines: readonly PurchaseLine[];
   hardware: readonly Choice[];
+  /** Those among it that customers bring, which cost nothing. */
+  fromCustomer: readonly number[];
   mayPrice: boolean;
 }
 
 /** The hardware and supplies that came, counted; of an order, what is still to come stands there already. */
-export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHardwareListProps) {
+export function ReceivedHardwareList(props: ReceivedHardwareListProps) {
+  const { lines, hardware, fromCustomer, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ hardware: TypedHardware[] }>({
     name: 'hardware',
   });
@@ -39,6 +43,7 @@ export function ReceivedHardwareList({ lines, hardware, mayPrice }: ReceivedHard
             at={at}
             line={lines.find(({ id }) => id === field.purchaseLineId)}
             hardware={hardware}
+            fromCustomer={fromCustomer}
             mayPrice={mayPrice}
             onRemove={() => remove(at)}
           />
@@ -79,11 +84,13 @@ interface ReceivedHardwareProps {
   at: number;
   line: PurchaseLine | undefined;
   hardware: readonly Choice[];
+  fromCustomer: readonly number[];
   mayPrice: boolean;
   onRemove: () => void;
 }
 
-function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHardwareProps) {
+function ReceivedHardware(props: ReceivedHardwareProps) {
+  const { at, line, hardware, fromCustomer, mayPrice, onRemove } = props;
   const row = `hardware.${at}`;
   const { setValue } = useFormContext();
   return (
@@ -133,16 +140,27 @@ function ReceivedHardware({ at, line, hardware, mayPrice, onRemove }: ReceivedHa
           />
         )}
         <TextField name={`${row}.batch`} label="Batch" optional help="As printed on the bag." />
-        {mayPrice && (
-          <MoneyField
-            name={`${row}.cost`}
-            label="Cost of all"
-            optional
-            whenEmpty="null"
-            help="Left empty, it is worked out from the price."
-          />
-        )}
+        {mayPrice && <CostField row={row} fromCustomer={fromCustomer} />}
       </div>
     </div>
+  );
+}
+
+/** What the customer brings has no cost to be typed, nor keeps one from before it was chosen. */
+function CostField({ row, fromCustomer }: { row: string; fromCustomer: readonly number[] }) {
+  const { setValue } = useFormContext();
+  const theirs = fromCustomer.includes(Number(useWatch({ name: `${row}.hardwareId` })));
+  useEffect(() => {
+    if (theirs) setValue(`${row}.cost`, null);
+  }, [theirs, row, setValue]);
+  if (theirs) return <p className="text-ink-soft">The customer brings it: it costs nothing.</p>;
+  return (
+    <MoneyField
+      name={`${row}.cost`}
+      label="Cost of all"
+      optional
+      whenEmpty="null"
+      help="Left empty, it is worked out from the price."
+    />
   );
 }
