@@ -233,7 +233,7 @@ walk('what came without an order is listed, and what it cost is put right', asyn
   await settled(page);
   await expectNoOverflow(page);
   await card.getByRole('link', { name: 'MKT-1' }).click();
-  await page.getByText('6.047 oz (2.4 mm)').waitFor();
+  await page.getByText('6.05 oz (2.4 mm)').waitFor();
   const lies = page.getByRole('region', { name: 'Where it lies' });
   await lies.getByLabel(/^Weight/).fill('5½');
   await lies.getByRole('button', { name: 'Save' }).click();

@@ -3,6 +3,7 @@ import { logDeed } from '../modules/activity/activity-log.ts';
 import { findJob, findWantedJob, requireJobState } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import { describeItem } from '../modules/stock/described-item.ts';
+import { refuseKit } from '../modules/stock/refuse-kit.ts';
 import type { StockItem } from '../modules/stock/stock-item.ts';
 import { releaseReservations, reserveStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
@@ -12,12 +13,14 @@ import { requireItsLeather } from './its-leather.ts';
 /**
  * Holds leather of a named lot, or hardware, for a job.
  * @throws {Problem} 404; 409 naming what is free when it is less, or when the job is finished; 422 for another leather
+ * or a kit
  */
 export async function holdForJob(work: Work, jobId: number, asked: AskedAmount): Promise<Job> {
   const job = await findWantedJob(work.em, jobId);
   requireJobState(job, 'waiting', 'ready', 'at the bench', 'paused');
   const { quantity, ...item } = ledgerAmount(asked);
   if (typeof item.lotId === 'number') await requireItsLeather(work, job, item.lotId);
+  await refuseKit(work.em, item);
   await reserveStock(work, { jobId, ...item, quantity });
   await note(work, job, item, quantity, 'held');
   return job;

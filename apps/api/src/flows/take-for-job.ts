@@ -6,6 +6,7 @@ import { findWantedJob, requireJobState } from '../modules/jobs/find-job.ts';
 import type { Job } from '../modules/jobs/job.entity.ts';
 import { describeItem } from '../modules/stock/described-item.ts';
 import { heldForJob } from '../modules/stock/held-for-job.ts';
+import { refuseKit } from '../modules/stock/refuse-kit.ts';
 import type { StockItem } from '../modules/stock/stock-item.ts';
 import { takeStock } from '../modules/stock/stock-ledger.ts';
 import type { Work } from '../work.ts';
@@ -17,7 +18,7 @@ const inLedger = (areaMm2: string): number => scaled(new Decimal(areaMm2), 3);
 /**
  * Takes leather from a named lot, or hardware, for a job: what is held for it first, then what is free.
  * @throws {Problem} 404, 409 when the job is not at the bench, other than was seen is held for it or less is to be
- * had, 422 when the lot is of another leather
+ * had, 422 when the lot is of another leather or the hardware is a kit
  */
 export async function takeForJob(
   work: Work,
@@ -34,6 +35,7 @@ export async function takeForJob(
     await takeStock(work, { jobId, lotId, quantity: inLedger(areaMm2), reason });
   } else {
     const { hardwareId, quantity, heldSeenQuantity: seen } = taking;
+    await refuseKit(work.em, { hardwareId });
     if (seen !== undefined) await requireHeld(work, job, { hardwareId }, seen);
     await takeStock(work, { jobId, hardwareId, quantity, reason });
   }

@@ -11,7 +11,7 @@ interface Weight {
 export function weightText({ weightLowOz, weightHighOz }: Weight): string {
   if (weightLowOz === null) return '';
   const high = weightHighOz ?? weightLowOz;
-  const oz = rangeText(numberText(weightLowOz, 3), numberText(high, 3));
+  const oz = rangeText(numberText(weightLowOz, 2), numberText(high, 2));
   return `${oz} oz (${thicknessText({ weightLowOz, weightHighOz })})`;
 }
 

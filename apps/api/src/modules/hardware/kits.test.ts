@@ -89,6 +89,20 @@ describe('a kit', () => {
       .expect(422);
   });
 
+  it('is not ordered itself either, since it could not be received', async () => {
+    const { body: supplier } = await owner().post('/api/suppliers').send({ name: 'Kettlewell' });
+    const lines = [{ of: 'hardware', hardwareId: kit.id, quantity: 10, unitPrice: '0.10' }];
+    const order = { supplierId: supplier.id, lines };
+    const { body } = await owner().post('/api/purchase-orders').send(order).expect(422);
+    expect(body.errors).toEqual([
+      {
+        field: 'lines.0.hardwareId',
+        message:
+          'Rivet 9 mm is a kit and is counted by its parts: enter Cap 9 mm and Post 8 mm instead.',
+      },
+    ]);
+  });
+
   it('rises in version when only its parts change, and costs what is typed where that is wanted', async () => {
     const before = await read(kit.id);
     const parts = [

@@ -13,6 +13,7 @@ import type { Work } from '../../work.ts';
 import { logDeed } from '../activity/activity-log.ts';
 import { Hardware } from '../hardware/hardware.entity.ts';
 import { Leather } from '../leathers/leather.entity.ts';
+import { refuseKit } from '../stock/refuse-kit.ts';
 import { Supplier } from '../suppliers/supplier.entity.ts';
 import { requireBookable } from './line-amount.ts';
 import { noteAwaited } from './note-awaited.ts';
@@ -156,10 +157,10 @@ async function requireThing(work: Work, line: GoodsLineTyped, field: string): Pr
     if ((await work.em.findOne(Leather, line.leatherId)) !== null) return;
     throw invalid([{ field: `${field}.leatherId`, message: 'Choose a leather from the list.' }]);
   }
-  if ((await work.em.findOne(Hardware, line.hardwareId)) !== null) return;
-  throw invalid([
-    { field: `${field}.hardwareId`, message: 'Choose hardware or supplies from the list.' },
-  ]);
+  const hardwareId = `${field}.hardwareId`;
+  if ((await work.em.findOne(Hardware, line.hardwareId)) === null)
+    throw invalid([{ field: hardwareId, message: 'Choose hardware or supplies from the list.' }]);
+  await refuseKit(work.em, line, hardwareId);
 }
 
 async function requireSupplier(work: Work, id: number): Promise<void> {

@@ -8,7 +8,11 @@ import type { StockItem } from './stock-item.ts';
  * A kit has no stock of its own: what moves are its parts.
  * @throws {Problem} 422 naming the parts
  */
-export async function refuseKit(em: EntityManager, item: StockItem): Promise<void> {
+export async function refuseKit(
+  em: EntityManager,
+  item: StockItem,
+  field = 'hardwareId',
+): Promise<void> {
   if (typeof item.hardwareId !== 'number') return;
   const parts = await em.find(KitPart, { kitId: item.hardwareId }, { orderBy: { id: 'asc' } });
   if (parts.length === 0) return;
@@ -16,5 +20,5 @@ export async function refuseKit(em: EntityManager, item: StockItem): Promise<voi
   const named = await em.find(Hardware, { id: { $in: [item.hardwareId, ...ids] } });
   const nameOf = (id: number) => named.find((each) => each.id === id)?.name ?? '';
   const message = `${nameOf(item.hardwareId)} is a kit and is counted by its parts: enter ${ids.map(nameOf).join(' and ')} instead.`;
-  throw invalid([{ field: 'hardwareId', message }]);
+  throw invalid([{ field, message }]);
 }

@@ -10,6 +10,11 @@ import { countText } from '../../../lib/formatting.ts';
 
 const most = 10;
 
+const noteOn = (parts: number) => {
+  if (parts === 0) return '';
+  return parts === 1 ? '1 part' : `${countText(parts)} parts`;
+};
+
 /** What a kit is made up of. */
 export function KitFields({ choices }: { choices: readonly Choice[] }) {
   const { fields, append, remove } = useFieldArray({ name: 'parts' });
@@ -17,7 +22,7 @@ export function KitFields({ choices }: { choices: readonly Choice[] }) {
   return (
     <More
       word="Made up of other hardware"
-      note={fields.length === 0 ? '' : `${countText(fields.length)} parts`}
+      note={noteOn(fields.length)}
       names={['parts', 'priceFromParts']}
     >
       <p className="text-sm text-ink-soft">

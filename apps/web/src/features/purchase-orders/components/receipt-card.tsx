@@ -2,7 +2,7 @@ import type { PurchaseOrder, Receipt } from '@hidewright/contract';
 import { useState } from 'react';
 import { Button } from '../../../components/button.tsx';
 import { Card } from '../../../components/card.tsx';
-import { dayText, moneyText } from '../../../lib/formatting.ts';
+import { dayText, instantText, moneyText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { PriceNotice } from './price-notice.tsx';
 import { ReceiptCostsDialog } from './receipt-costs-dialog.tsx';
@@ -20,15 +20,16 @@ interface ReceiptCardProps {
 
 /** One delivery: what came, what it cost, and what of it is other than was marked or ordered. */
 export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
-  const { today } = useWorkshop();
+  const { today, timeZone } = useWorkshop();
   const [correcting, setCorrecting] = useState(false);
   const { freight, duty } = receipt;
   const day = dayText(receipt.receivedOn, today);
-  const title = of ? `Delivery ${of.count}, ${day}` : `${day}: ${whatCame(receipt)}`;
+  const written = instantText(receipt.at, timeZone, today);
+  const title = of ? `Delivery ${of.count}, ${day}` : `${written}: ${whatCame(receipt)}`;
   return (
     <Card
       title={title}
-      subtitle={`received by ${receipt.byName}`}
+      subtitle={of ? `received by ${receipt.byName}` : `came ${day}, received by ${receipt.byName}`}
       aside={
         isOwner &&
         receipt.staysBecause === null && (
@@ -50,7 +51,7 @@ export function ReceiptCard({ receipt, of, isOwner }: ReceiptCardProps) {
   );
 }
 
-/** MKT-1 and 2 more: several deliveries of one day are told apart by it. */
+/** MKT-1 and 2 more: with the time, several deliveries of one day are told apart by it. */
 function whatCame({ lines }: Receipt): string {
   const [first, ...others] = lines.map(({ lotTag, name }) => lotTag ?? name);
   return [first, ...(others.length > 0 ? [`${others.length} more`] : [])].join(' and ');
