@@ -1,17 +1,9 @@
-import type { BodyOf, draftSuggested, GoodsLineTyped } from '@hidewright/contract';
+import type { BodyOf, draftSuggested } from '@hidewright/contract';
 import { Decimal } from 'decimal.js';
-import { unscaled } from '../db/columns/scaled-decimal.ts';
-import { priceText } from '../http/decimal-text.ts';
 import { invalid } from '../http/problem.ts';
-import {
-  changeDraft,
-  draftPurchaseOrder,
-} from '../modules/purchase-orders/draft-purchase-order.ts';
-import { PurchaseLine } from '../modules/purchase-orders/purchase-line.entity.ts';
-import { PurchaseOrder } from '../modules/purchase-orders/purchase-order.entity.ts';
-import type { Workshop } from '../modules/workshop/workshop.entity.ts';
 import type { Work } from '../work.ts';
-import { mergedLine } from './order-suggestions/merged-line.ts';
+import type { MoreOf } from './order-suggestions/merged-line.ts';
+import { putOnDraft } from './order-suggestions/put-on-draft.ts';
 import { suggestOrders, type Suggested } from './order-suggestions/suggest-orders.ts';
 
 type AskedLine = BodyOf<typeof draftSuggested>['lines'][number];
@@ -25,8 +17,6 @@ interface Drafted {
   orderIds: number[];
   notes: string[];
 }
-
-const mostLines = 100;
 
 /**
  * Puts what is asked for on the newest draft to its supplier, or on a new one: one draft for each supplier, and one
@@ -44,8 +34,9 @@ export async function draftSuggestedOrders(
   const orderIds: number[] = [];
   for (const supplierId of new Set(able.map(({ item }) => item.sold.supplier?.id ?? 0))) {
     const own = able.filter(({ item }) => item.sold.supplier?.id === supplierId);
-    const put = await putOnDraft(work, supplierId, { wanted: own, workshop });
-    orderIds.push(put.orderId);
+    const things = own.map(moreOf);
+    const put = await putOnDraft(work, { supplierId, things, areaUnit: workshop.areaUnit });
+    orderIds.push(put.order.id);
     notes.push(...put.notes);
   }
   return { orderIds, notes };
@@ -77,75 +68,8 @@ function noteOn({ item, asked }: Wanted): string[] {
   ];
 }
 
-async function putOnDraft(
-  work: Work,
-  supplierId: number,
-  { wanted, workshop }: { wanted: readonly Wanted[]; workshop: Workshop },
-): Promise<{ orderId: number; notes: string[] }> {
-  const draft = await newestDraft(work, supplierId);
-  const there = draft === null ? [] : await linesOf(work, draft);
-  const merged = withWanted(there, wanted, workshop);
-  if (draft !== null && merged.lines.length <= mostLines) {
-    await changeDraft(work, draft, { lines: merged.lines });
-    return { orderId: draft.id, notes: merged.notes };
-  }
-  const { lines, notes } = withWanted([], wanted, workshop);
-  const made = await draftPurchaseOrder(work, {
-    supplierId,
-    // Worked out when it is sent, from whatever is on it by then.
-    expectedOn: null,
-    note: '',
-    lines,
-  });
-  return { orderId: made.id, notes };
-}
-
-/** A draft that sends leather out to be worked on is left alone: it waits for its lot. */
-async function newestDraft({ em }: Work, supplierId: number): Promise<PurchaseOrder | null> {
-  const newest = { orderBy: { id: 'desc' } } as const;
-  const drafts = await em.find(PurchaseOrder, { supplierId, state: 'draft' }, newest);
-  const ids = drafts.map(({ id }) => id);
-  const works = await em.find(PurchaseLine, { purchaseOrderId: ids, service: { $ne: null } });
-  const busy = new Set(works.map(({ purchaseOrderId }) => purchaseOrderId));
-  return drafts.find(({ id }) => !busy.has(id)) ?? null;
-}
-
-async function linesOf({ em }: Work, draft: PurchaseOrder): Promise<GoodsLineTyped[]> {
-  const lines = await em.find(
-    PurchaseLine,
-    { purchaseOrderId: draft.id },
-    { orderBy: { position: 'asc' } },
-  );
-  return lines.map(({ leatherId, hardwareId, quantity, unitPrice }): GoodsLineTyped =>
-    leatherId === null
-      ? { of: 'hardware', hardwareId: hardwareId ?? 0, quantity, unitPrice: priceText(unitPrice) }
-      : {
-          of: 'leather',
-          leatherId,
-          areaMm2: unscaled(quantity, 3).toFixed(),
-          unitPrice: priceText(unitPrice),
-        },
-  );
-}
-
-/** More of what is on the draft already goes to its line. */
-function withWanted(
-  lines: readonly GoodsLineTyped[],
-  wanted: readonly Wanted[],
-  workshop: Workshop,
-): { lines: GoodsLineTyped[]; notes: string[] } {
-  const all = [...lines];
-  const notes: string[] = [];
-  for (const { item, asked } of wanted) {
-    const at = all.findIndex((line) => isOf(line, asked));
-    const merged = mergedLine(item, { there: all[at], more: asked.quantity }, workshop);
-    all.splice(at === -1 ? all.length : at, at === -1 ? 0 : 1, merged.line);
-    notes.push(...merged.notes);
-  }
-  return { lines: all, notes };
-}
-
-const isOf = (line: GoodsLineTyped, asked: AskedLine): boolean =>
-  line.of === 'leather'
-    ? asked.of === 'leather' && line.leatherId === asked.id
-    : asked.of === 'hardware' && line.hardwareId === asked.id;
+const moreOf = ({ item: { row, sold }, asked }: Wanted): MoreOf => ({
+  ...{ of: row.of, id: row.id, name: row.name, unit: row.unit },
+  terms: sold.terms,
+  more: asked.quantity,
+});

@@ -1,5 +1,6 @@
 import {
   amountToBuy,
+  type HardwareUnit,
   leatherToBuy,
   type Sourcing,
   type Standing,
@@ -12,6 +13,7 @@ export interface Lacking {
   of: 'leather' | 'hardware';
   id: number;
   name: string;
+  unit: 'mm2' | HardwareUnit;
   buying: Sourcing;
   /** Beyond what is drafted already. */
   missing: number;
@@ -31,10 +33,10 @@ export function lackingOf({ shop, runs }: CheckedRuns): Lacking[] {
     });
     const short = sumUp(standings);
     const toBuy = short.missing > 0 ? leatherToBuy(leather, short.missing) : null;
-    return { of: 'leather', id, name, buying, ...short, toBuy };
+    return { of: 'leather', id, name, unit: 'mm2', buying, ...short, toBuy };
   });
   const items = shop.items.map((item): Lacking => {
-    const { hardwareId: id, name, buying } = item;
+    const { hardwareId: id, name, unit = 'piece', buying } = item;
     const standings = runs.flatMap((run) =>
       run.facts.items
         .filter((each) => each.item.hardwareId === id)
@@ -42,7 +44,7 @@ export function lackingOf({ shop, runs }: CheckedRuns): Lacking[] {
     );
     const short = sumUp(standings);
     const toBuy = short.missing > 0 ? amountToBuy(buying.terms, String(short.missing)) : null;
-    return { of: 'hardware', id, name, buying, ...short, toBuy };
+    return { of: 'hardware', id, name, unit, buying, ...short, toBuy };
   });
   return [...leathers, ...items];
 }

@@ -3,7 +3,7 @@ import { Exact, isPriceKnown, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
 
-interface Thing {
+export interface Thing {
   of: 'leather' | 'hardware';
   id: number;
 }

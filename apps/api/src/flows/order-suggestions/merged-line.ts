@@ -1,12 +1,20 @@
 import type { GoodsLineTyped } from '@hidewright/contract';
-import { countedWords, Exact, type OfferTerms } from '@hidewright/domain';
+import { countedWords, Exact, type HardwareUnit, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { sayArea } from '../../modules/stock/say-area.ts';
 import type { Workshop } from '../../modules/workshop/workshop.entity.ts';
-import { boughtLine, unpricedNote } from './bought-line.ts';
-import type { Suggested } from './suggest-orders.ts';
+import { boughtLine, unpricedNote, type Thing } from './bought-line.ts';
 
-export interface Merged {
+/** A thing of which more is to be bought, on the terms of whoever sells it. */
+export interface MoreOf extends Thing {
+  name: string;
+  unit: 'mm2' | HardwareUnit;
+  terms: OfferTerms;
+  /** in pieces, or in mm² */
+  more: string;
+}
+
+interface Merged {
   line: GoodsLineTyped;
   notes: string[];
 }
@@ -16,25 +24,26 @@ export interface Merged {
  * one that somebody typed on the draft.
  */
 export function mergedLine(
-  { row, sold: { terms } }: Suggested,
-  { there, more }: { there: GoodsLineTyped | undefined; more: string },
-  { areaUnit }: Workshop,
+  thing: MoreOf,
+  there: GoodsLineTyped | undefined,
+  areaUnit: Workshop['areaUnit'],
 ): Merged {
+  const { name, unit, terms, more } = thing;
   const before = quantityOf(there);
   const both = new Exact(before).plus(more);
-  const drafted = row.of === 'hardware' ? inWhatIsSold(both, terms) : both;
-  const line = boughtLine(row, terms, drafted.toFixed());
-  const typed = there !== undefined && there.unitPrice !== boughtLine(row, terms, before).unitPrice;
-  const { unit } = row;
+  const drafted = thing.of === 'hardware' ? inWhatIsSold(both, terms) : both;
+  const line = boughtLine(thing, terms, drafted.toFixed());
+  const typed =
+    there !== undefined && there.unitPrice !== boughtLine(thing, terms, before).unitPrice;
   const say = (quantity: string) =>
     unit === 'mm2' ? sayArea(new Decimal(quantity), areaUnit) : countedWords(quantity, unit);
   const put = typed ? { ...line, unitPrice: there.unitPrice } : line;
   return {
     line: put,
     notes: [
-      ...soldNote(row.name, { terms, asked: both, drafted, say }),
-      ...(typed ? [`${row.name} keeps the price that was typed on its draft.`] : []),
-      ...unpricedNote(row.name, put),
+      ...soldNote(name, { terms, asked: both, drafted, say }),
+      ...(typed ? [`${name} keeps the price that was typed on its draft.`] : []),
+      ...unpricedNote(name, put),
     ],
   };
 }

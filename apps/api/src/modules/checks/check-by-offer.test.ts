@@ -82,6 +82,26 @@ it('goes on to a price break that costs less, says so, and shows the maker no pr
   expect(notes).toContain('Rivet 9 mm: 150 cost less than 100, so 150 are drafted.');
 });
 
+it('adds to the draft that waits for its supplier, so that both reach a price break together', async () => {
+  const { hardwareId } = ready;
+  const breaks = [
+    { from: '0', price: '0.20' },
+    { from: '100', price: '0.12' },
+  ];
+  await offer({ hardwareId, supplierId: fittings, breaks });
+  const lines = [{ of: 'hardware', hardwareId, quantity: 50, unitPrice: '0.20' }];
+  const typed = { supplierId: fittings, lines };
+  const { body: before } = await owner().post('/api/purchase-orders').send(typed).expect(201);
+  const { orders } = await draft();
+  expect(orders).toMatchObject([
+    {
+      ...{ id: before.id, lines: [{ quantity: 100, unitPrice: '0.12' }] },
+      draftedFor: expect.stringMatching(/, packed by Mon 21 Dec 2026$/),
+    },
+  ]);
+  expect((await draft()).orders).toEqual([]);
+});
+
 it('names what could be had for the same money, and does not take it by itself', async () => {
   const breaks = [
     { from: '0', price: '0.20' },
