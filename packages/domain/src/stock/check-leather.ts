@@ -27,6 +27,8 @@ export interface LeatherFacts {
   takes: LotTaken[];
   /** tags of lots that have something free, of which no panel can be cut whole */
   tooSmall: string[];
+  /** tags of lots whose usable share holds no panel beside what is gone of it */
+  tooLittle: string[];
   /** more than one where they would mix */
   shades: string[];
   likeShade: string | null;
@@ -66,7 +68,8 @@ export function drawLeather(
   const facts = {
     leather,
     takes,
-    tooSmall: offered.filter(noneFits).map(({ lot }) => lot.tag),
+    tooSmall: tagsOf(offered.filter((each) => givesNone(each, 'panels'))),
+    tooLittle: tagsOf(offered.filter((each) => givesNone(each, 'area'))),
     shades: shadesOf(offers, chosen),
     likeShade: need.likeShade,
     piecesNeeded: when.pieces,
@@ -84,8 +87,10 @@ const toOffer = ({ lot: { lotId, shade, receivedOn }, from: { pieces } }: Offere
   pieces,
 });
 
-const noneFits = ({ lot, from }: Offered): boolean =>
-  from.by === 'panels' && from.pieces === 0 && lot.freeArea > 0;
+const givesNone = ({ lot, from }: Offered, by: PiecesOfLot['by']): boolean =>
+  from.by === by && from.pieces === 0 && lot.freeArea > 0;
+
+const tagsOf = (offered: readonly Offered[]): string[] => offered.map(({ lot }) => lot.tag);
 
 /**
  * Pieces that may be cut now without taking what jobs taken on before still need. Nobody knows yet which lots those

@@ -127,6 +127,16 @@ describe('Can we make it?', () => {
     );
   });
 
+  it('names the lots of which too little is left for a panel', () => {
+    // 85 % of 10 panels' area is usable, and 8.4 panels are gone of it: what hangs there still is mostly waste.
+    const rest = lot(2, 1.6, { measuredArea: 1_200_000_000, usablePercent: 85 });
+    const stock = shop({ leathers: [russet([lot(1, 1), rest])] });
+    const [facts] = checkRuns(stock, [run(24)]);
+    expect(leatherWords(facts!.leather, say)).toContain(
+      '120000 mm² short. Too little left for a panel: L-2. Buy',
+    );
+  });
+
   it('leaves other jobs their leather where this run has the least of it, and keeps its layouts', () => {
     // Seventeen panels are usable, of which a layout makes 230 pieces in place of 204; one panel is owed.
     const drawn = lot(1, 20, { usablePercent: 85 });

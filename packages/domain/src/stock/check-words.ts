@@ -129,13 +129,17 @@ export function leatherWords(facts: LeatherFacts, say: Say): string {
 }
 
 /** Why leather that hangs there is not counted as free. */
-function smallWords({ tooSmall }: LeatherFacts): string[] {
-  if (tooSmall.length === 0) return [];
-  const named = tooSmall.slice(0, 3).join(', ');
-  const others = tooSmall.length - 3;
-  return [
-    `Too small for its panels: ${named}${others > 0 ? ` and ${countWords(others)} more` : ''}.`,
-  ];
+const smallWords = ({ tooSmall, tooLittle }: LeatherFacts): string[] => [
+  ...lotsWords('Too small for its panels', tooSmall),
+  ...lotsWords('Too little left for a panel', tooLittle),
+];
+
+/** "Too small for its panels: T-0002, T-0003, T-0004 and 2 more." */
+function lotsWords(why: string, tags: readonly string[]): string[] {
+  if (tags.length === 0) return [];
+  const others = tags.length - 3;
+  const more = others > 0 ? ` and ${countWords(others)} more` : '';
+  return [`${why}: ${tags.slice(0, 3).join(', ')}${more}.`];
 }
 
 function buyLeatherWords(leather: LeatherFacts['leather'], missing: number, say: Say): string {

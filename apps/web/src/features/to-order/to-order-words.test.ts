@@ -3,6 +3,7 @@ import { expect, it } from 'vitest';
 import {
   amountText,
   heldNote,
+  leadDaysText,
   leadWords,
   methodWords,
   priceWords,
@@ -75,6 +76,8 @@ it('says by which method use is expected, and why', () => {
 it('says who tells how long a delivery takes', () => {
   const lead = { meanDays: '7', sdDays: '0', deliveries: 0 };
   expect(leadWords(item({ lead, supplierName: 'Fennbridge Fittings' }))).toContain('says 7 days');
+  expect(leadDaysText(item({ lead, supplierName: 'Fennbridge Fittings' }))).toBe('7 days');
+  expect(leadDaysText(item({ lead, supplierName: null }))).toBe('not known');
   const took = { meanDays: '6.4', sdDays: '1.2', deliveries: 5 };
   expect(leadWords(item({ lead: took, supplierName: 'Fennbridge Fittings' }))).toContain(
     'The last 5 deliveries of Fennbridge Fittings took 6.4 days on average, give or take 1.2.',

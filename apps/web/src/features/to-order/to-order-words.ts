@@ -86,9 +86,14 @@ export function methodWords(item: Item, say: (value: string) => string): string 
 }
 
 /** How long a delivery takes, and who says so. */
+/** "6.4 days", as long as anybody is named who delivers. */
+export const leadDaysText = ({ lead, supplierName }: Item): string =>
+  supplierName === null ? 'not known' : daysText(numberText(lead.meanDays, 1));
+
+const daysText = (days: string): string => `${days} ${days === '1' ? 'day' : 'days'}`;
+
 export function leadWords({ lead, supplierName }: Item): string {
-  const mean = numberText(lead.meanDays, 1);
-  const days = `${mean} ${mean === '1' ? 'day' : 'days'}`;
+  const days = daysText(numberText(lead.meanDays, 1));
   if (supplierName === null) return 'Nobody is named who sells it.';
   return lead.deliveries === 0
     ? `${supplierName} says ${days}. From three deliveries on, what they took counts instead.`

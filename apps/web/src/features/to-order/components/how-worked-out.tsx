@@ -2,7 +2,14 @@ import type { OrderSuggestionReply } from '@hidewright/contract';
 import type { ReactNode } from 'react';
 import { moneyText, numberText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
-import { amountText, leadWords, methodWords, periodWord, soldWords } from '../to-order-words.ts';
+import {
+  amountText,
+  leadDaysText,
+  leadWords,
+  methodWords,
+  periodWord,
+  soldWords,
+} from '../to-order-words.ts';
 import { UseBars } from './use-bars.tsx';
 
 interface HowWorkedOutProps {
@@ -16,7 +23,7 @@ interface HowWorkedOutProps {
 export function HowWorkedOut({ item, ...rates }: HowWorkedOutProps) {
   const workshop = useWorkshop();
   const say = (value: string) => amountText(value, item, workshop);
-  const { usage, workedOut, lead } = item;
+  const { usage, workedOut } = item;
   const period = periodWord(item);
   return (
     <section aria-label={`How ${item.name} is worked out`} className="space-y-2">
@@ -38,7 +45,7 @@ export function HowWorkedOut({ item, ...rates }: HowWorkedOutProps) {
       >
         {methodWords(item, say)}
       </Worked>
-      <Worked word="A delivery takes" figure={`${numberText(lead.meanDays, 1)} days`}>
+      <Worked word="A delivery takes" figure={leadDaysText(item)}>
         {leadWords(item)}
       </Worked>
       {workedOut && (
