@@ -218,6 +218,9 @@ walk('what came without an order is listed, and what it cost is put right', asyn
   await lot.getByLabel(/^Weight/).fill('2.4 mm');
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Put it on the rack' }).click();
+  const title = page.getByRole('heading', { level: 1, name: 'Received' });
+  await title.waitFor();
+  expect(await title.evaluate((each) => each === document.activeElement)).toBe(true);
   await page.getByRole('link', { name: 'To the delivery' }).click();
   await page.waitForURL('**/stockroom/deliveries');
   const card = page.getByRole('region').filter({ hasText: 'MKT-1' }).first();

@@ -8,7 +8,12 @@ export function useFocusAfterMove() {
   useEffect(() => {
     if (last.current === pathname) return;
     last.current = pathname;
-    const title = document.querySelector<HTMLElement>('main h1') ?? document.getElementById('main');
-    title?.focus({ preventScroll: true });
+    focusTitle();
   }, [pathname]);
+}
+
+/** For a page that becomes another at the same address. */
+export function focusTitle(): void {
+  const title = document.querySelector<HTMLElement>('main h1') ?? document.getElementById('main');
+  title?.focus({ preventScroll: true });
 }

@@ -1,6 +1,6 @@
 import type { PurchaseOrder, receiveDelivery, ReplyOf } from '@hidewright/contract';
 import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { useLoaderData, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom';
 import { Button } from '../../../components/button.tsx';
 import { EmptyState } from '../../../components/empty-state.tsx';
@@ -26,6 +26,7 @@ import {
 import { draftKeyAt } from '../../../lib/draft.ts';
 import { queryClient } from '../../../lib/query-client.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
+import { focusTitle } from '../../use-focus-after-move.ts';
 import { choicesOf } from './choices.ts';
 import { useRole } from './use-role.ts';
 
@@ -152,6 +153,7 @@ interface ReceivedProps {
 }
 
 function Received({ received, onMore }: ReceivedProps) {
+  useEffect(focusTitle, []);
   const order = received.purchaseOrder;
   const open = order === null || order.state === 'part received';
   return (
