@@ -1,5 +1,5 @@
 import type { GoodsLineTyped } from '@hidewright/contract';
-import { Exact, isPriceKnown, type OfferTerms } from '@hidewright/domain';
+import { Exact, type OfferTerms } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { priceText } from '../../http/decimal-text.ts';
 
@@ -19,12 +19,4 @@ export function boughtLine(
   return of === 'leather'
     ? { of, leatherId: id, areaMm2: quantity, unitPrice }
     : { of, hardwareId: id, quantity: Number(quantity), unitPrice };
-}
-
-/** Of a line whose price nobody knows: it is drafted all the same, and the order says 0.00 until one is entered. */
-export function unpricedNote(name: string, { unitPrice }: GoodsLineTyped): string[] {
-  if (isPriceKnown(unitPrice)) return [];
-  return [
-    `${name} is drafted at 0.00, as its price is not known. Ask for it before you send the order.`,
-  ];
 }

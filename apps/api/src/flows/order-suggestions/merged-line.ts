@@ -1,9 +1,15 @@
 import type { GoodsLineTyped } from '@hidewright/contract';
-import { countedWords, Exact, type HardwareUnit, type OfferTerms } from '@hidewright/domain';
+import {
+  countedWords,
+  Exact,
+  type HardwareUnit,
+  isPriceKnown,
+  type OfferTerms,
+} from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import { sayArea } from '../../modules/stock/say-area.ts';
 import type { Workshop } from '../../modules/workshop/workshop.entity.ts';
-import { boughtLine, unpricedNote, type Thing } from './bought-line.ts';
+import { boughtLine, type Thing } from './bought-line.ts';
 
 /** A thing of which more is to be bought, on the terms of whoever sells it. */
 export interface MoreOf extends Thing {
@@ -84,3 +90,9 @@ function soldNote(name: string, { terms, asked, drafted, say }: Drafted): string
       : `${name}: ${say(drafted.toFixed())} is drafted, for it is sold ${sold}.`,
   ];
 }
+
+/** Of a line whose price nobody knows: it is drafted all the same. */
+const unpricedNote = (name: string, { unitPrice }: GoodsLineTyped): string[] =>
+  isPriceKnown(unitPrice)
+    ? []
+    : [`The price of ${name} is not known: its order asks the supplier for it.`];

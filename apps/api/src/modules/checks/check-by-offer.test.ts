@@ -167,8 +167,7 @@ describe('from whom it was bought before somebody else made an offer', () => {
     ]);
     expect(notes).toEqual(
       ['Oak tan 5–6 oz', 'Rivet 9 mm'].map(
-        (name) =>
-          `${name} is drafted at 0.00, as its price is not known. Ask for it before you send the order.`,
+        (name) => `The price of ${name} is not known: its order asks the supplier for it.`,
       ),
     );
   });

@@ -71,7 +71,7 @@ export function lineText(
   const unpriced = isFigure(price) && !isPriceKnown(price);
   return [
     terms && termsText(terms, much, price, habit),
-    unpriced && 'Its price is not known: ask for it, or the order goes out at 0.00.',
+    unpriced && 'Its price is not known: the order asks the supplier for it.',
   ]
     .filter(Boolean)
     .join(' ');

@@ -39,7 +39,7 @@ it('names the lines without a price, whether or not an offer was entered', () =>
     ...each,
     unitPrice: '0.00',
   }));
-  const text = 'Its price is not known: ask for it, or the order goes out at 0.00.';
+  const text = 'Its price is not known: the order asks the supplier for it.';
   expect(orderRemarks({ lines: unpriced }, [offer(7)], { areaUnit: 'ft2' })).toEqual([
     { lineId: 1, name: 'Rivets 7', text },
     { lineId: 2, name: 'Rivets 6', text },
