@@ -33,6 +33,18 @@ describe('stock held for a job by hand', () => {
     await post('reservations', { lotId: ready.lotId, areaMm2: '0' }).expect(422);
   });
 
+  it('is the parts of a kit, never the kit, and so is what is taken', async () => {
+    const parts = [{ hardwareId: ready.hardwareId, quantity: 2 }];
+    const kit = { kind: 'hardware', name: 'Rivet pair', unitPrice: '0.34', parts };
+    const { body } = await ready.shop.as('owner').post('/api/hardware').send(kit).expect(201);
+    for (const what of ['reservations', 'takings']) {
+      const refused = await post(what, { hardwareId: body.id, quantity: 1 }).expect(422);
+      expect(refused.body.errors[0].message).toBe(
+        'Rivet pair is a kit and is counted by its parts: enter Rivet 9 mm instead.',
+      );
+    }
+  });
+
   it('is let go of, once', async () => {
     const body = { lotId: ready.lotId };
     ticket = (await post('releases', body).expect(201)).body as Job;

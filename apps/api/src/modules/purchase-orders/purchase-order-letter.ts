@@ -2,7 +2,8 @@ import { countedWords, figureWords, unitWord } from '@hidewright/domain';
 import { Decimal } from 'decimal.js';
 import type { PurchasedService, PurchaseLine, PurchaseOrder } from '@hidewright/contract';
 import { sayDay } from '../../say-day.ts';
-import { areaPriceOf, sayArea } from '../stock/say-area.ts';
+import { sayArea } from '../stock/say-area.ts';
+import { areaPriceOf } from './area-price.ts';
 
 import { sayOrderedArea } from './ordered-area.ts';
 import { isUnpriced } from './unpriced.ts';

@@ -3,9 +3,9 @@ import type { PurchasedService, PurchaseLine } from '@hidewright/contract';
 import { dayIn } from '../../day-in.ts';
 import type { PurchaseOrderPaper } from '../../papers/purchase-order-pdf.ts';
 import type { Work } from '../../work.ts';
-import { areaPriceOf } from '../stock/say-area.ts';
 
 import { Workshop } from '../workshop/workshop.entity.ts';
+import { areaPriceOf } from './area-price.ts';
 import { sayOrderedArea } from './ordered-area.ts';
 import type { PurchaseOrder } from './purchase-order.entity.ts';
 import { readOnePurchaseOrder } from './read-purchase-orders.ts';

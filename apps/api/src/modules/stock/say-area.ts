@@ -1,12 +1,5 @@
 import type { Decimal } from 'decimal.js';
-import {
-  convert,
-  figureWords,
-  priceFromFt2,
-  rackFootage,
-  toAtMost,
-  type AreaHabit,
-} from '@hidewright/domain';
+import { convert, figureWords, rackFootage, toAtMost, type AreaHabit } from '@hidewright/domain';
 
 export const areaSigns = { ft2: 'ft²', dm2: 'dm²', m2: 'm²' } as const;
 const places = { ft2: 2, dm2: 1, m2: 3 } as const;
@@ -21,10 +14,4 @@ export function sayArea(areaMm2: Decimal, unit: keyof typeof areaSigns): string 
 export function sayRackArea(areaMm2: Decimal, habit: AreaHabit): string {
   const footage = rackFootage(areaMm2.toFixed(), habit);
   return footage === undefined ? sayArea(areaMm2, habit.areaUnit) : `${footage} ${areaSigns.ft2}`;
-}
-
-/** The price of a ft² as one of the shop's own unit: "1.0226" of "per dm²". In ft² it stays as it was typed. */
-export function areaPriceOf(pricePerFt2: string, unit: keyof typeof areaSigns) {
-  const unitPrice = unit === 'ft2' ? pricePerFt2 : priceFromFt2(pricePerFt2, unit);
-  return { unitPrice, per: `per ${areaSigns[unit]}` };
 }
