@@ -4,6 +4,7 @@ import { useMemo } from 'react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { useCheckOnLeaving } from '../../../components/use-check-on-leaving.ts';
+import { useFocusKept } from '../../../components/use-focus-kept.ts';
 import { moneyText } from '../../../lib/formatting.ts';
 import { supplierOffersQuery } from '../../../lib/supplier-offers.queries.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
@@ -24,10 +25,15 @@ export function OrderLines({ leathers, hardware }: OrderLinesProps) {
   const lines = (useWatch({ name: 'lines' }) ?? []) as TypedLine[];
   const lots = useFreeLots(lines);
   const checkOnLeaving = useCheckOnLeaving();
+  const { list, keepFocus } = useFocusKept<HTMLFieldSetElement>();
+  const takeOut = (at: number) => {
+    remove(at);
+    keepFocus();
+  };
   const add = (of: 'leather' | 'hardware') =>
     append(blankLine(of), { focusName: `lines.${fields.length}.${of}Id` });
   return (
-    <fieldset className="min-w-0" onBlur={checkOnLeaving}>
+    <fieldset ref={list} tabIndex={-1} onBlur={checkOnLeaving}>
       <legend className="mb-3 text-lg font-semibold">What to order</legend>
       <div className="space-y-5">
         {fields.map((field, at) =>
@@ -37,7 +43,7 @@ export function OrderLines({ leathers, hardware }: OrderLinesProps) {
               at={at}
               lots={lots}
               leathers={leathers}
-              onRemove={() => remove(at)}
+              onRemove={() => takeOut(at)}
             />
           ) : (
             <OrderLine
@@ -46,7 +52,7 @@ export function OrderLines({ leathers, hardware }: OrderLinesProps) {
               of={field.of}
               goods={field.of === 'leather' ? leathers : hardware}
               offers={offers}
-              onRemove={() => remove(at)}
+              onRemove={() => takeOut(at)}
             />
           ),
         )}

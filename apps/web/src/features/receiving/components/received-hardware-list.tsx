@@ -9,6 +9,7 @@ import { NumberField } from '../../../components/number-field.tsx';
 import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { WeighCount } from '../../../components/weigh-count.tsx';
+import { useFocusKept } from '../../../components/use-focus-kept.ts';
 import { ReceivedLegend } from './received-legend.tsx';
 import { blankHardware, isOpen, type TypedHardware } from '../typed-delivery.ts';
 
@@ -26,6 +27,7 @@ export function ReceivedHardwareList(props: ReceivedHardwareListProps) {
   const { fields, append, remove } = useFieldArray<{ hardware: TypedHardware[] }>({
     name: 'hardware',
   });
+  const { list, keepFocus } = useFocusKept<HTMLFieldSetElement>();
   const left = lines.filter(
     (line) =>
       line.of === 'hardware' &&
@@ -34,7 +36,7 @@ export function ReceivedHardwareList(props: ReceivedHardwareListProps) {
   );
   const aside = lines.length > 0 && left.length === 0 && fields.length === 0;
   return (
-    <fieldset>
+    <fieldset ref={list} tabIndex={-1}>
       <ReceivedLegend aside={aside}>Hardware and supplies</ReceivedLegend>
       <div className="space-y-4">
         {fields.map((field, at) => (
@@ -45,7 +47,10 @@ export function ReceivedHardwareList(props: ReceivedHardwareListProps) {
             hardware={hardware}
             fromCustomer={fromCustomer}
             mayPrice={mayPrice}
-            onRemove={() => remove(at)}
+            onRemove={() => {
+              remove(at);
+              keepFocus();
+            }}
           />
         ))}
       </div>

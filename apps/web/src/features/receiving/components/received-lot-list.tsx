@@ -3,6 +3,7 @@ import { Plus } from 'lucide-react';
 import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import type { Choice } from '../../../components/select-field.tsx';
+import { useFocusKept } from '../../../components/use-focus-kept.ts';
 import { rackAreaText } from '../../../lib/formatting.ts';
 import { useWorkshop } from '../../../lib/workshop.tsx';
 import { blankLot, isOpen, lotBack, nextLot, type TypedLot } from '../typed-delivery.ts';
@@ -20,6 +21,7 @@ interface ReceivedLotListProps {
 export function ReceivedLotList(props: ReceivedLotListProps) {
   const { lines, leathers, tolerancePercent, mayPrice } = props;
   const { fields, append, remove } = useFieldArray<{ lots: TypedLot[] }>({ name: 'lots' });
+  const { list, keepFocus } = useFocusKept<HTMLFieldSetElement>();
   const workshop = useWorkshop();
   const open = lines.filter((line) => line.of !== 'hardware' && isOpen(line));
   const aside = lines.length > 0 && open.length === 0 && fields.length === 0;
@@ -39,7 +41,7 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
       : `${rackAreaText(areaMm2, workshop)} ${service === null ? 'to come' : 'went out'}`;
 
   return (
-    <fieldset>
+    <fieldset ref={list} tabIndex={-1}>
       <ReceivedLegend aside={aside}>Leather</ReceivedLegend>
       <div className="space-y-4">
         {fields.map((field, at) => {
@@ -54,7 +56,10 @@ export function ReceivedLotList(props: ReceivedLotListProps) {
               leathers={leathers}
               tolerancePercent={tolerancePercent}
               mayPrice={mayPrice}
-              onRemove={() => remove(at)}
+              onRemove={() => {
+                remove(at);
+                keepFocus();
+              }}
             />
           );
         })}
