@@ -10,6 +10,7 @@ import { SelectField, type Choice } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { WeightField } from '../../../components/weight-field.tsx';
 import { MarkCheck } from './mark-check.tsx';
+import { SizeCheck } from './size-check.tsx';
 import { TagField } from './tag-field.tsx';
 
 const forms = lotForms.map((form) => ({ value: form, label: form }));
@@ -78,6 +79,7 @@ export function ReceivedLot(props: ReceivedLotProps) {
             <NumberField name={`${lot}.pieces`} label={`How many in the bundle`} />
             <LengthField name={`${lot}.widthMm`} label="Width of one" optional whenEmpty="null" />
             <LengthField name={`${lot}.heightMm`} label="Height of one" optional whenEmpty="null" />
+            <SizeCheck lot={lot} />
           </>
         )}
         <TextField name={`${lot}.shade`} label="Shade" optional />
@@ -171,7 +173,7 @@ function MoreOfLot({ lot, mayPrice, isWork }: MoreOfLotProps) {
               help={
                 isWork
                   ? 'Left empty, it is its share of the price on the order.'
-                  : 'Left empty, it is the marked area at the price per ft²; without a mark, the measured one.'
+                  : 'Left empty, it is the marked area at its price; without a mark, the measured one.'
               }
             />
           )}
